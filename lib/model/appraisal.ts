@@ -1,0 +1,106 @@
+import type { BillPart, Family, FormId, MethodId } from './ids.ts';
+import type { Design, DepthPair, MeasuredLine, Quantities } from './design.ts';
+import type { Dropped, Ruling } from './ruling.ts';
+import type { RoadProfile, Site } from './site.ts';
+import type { Unit } from './study.ts';
+import type { DroppedCount } from './option.ts';
+
+/** Low, likely and high: 10, 50 and 90 % of the draws. */
+export interface Spread {
+  readonly p10: number;
+  readonly p50: number;
+  readonly p90: number;
+}
+
+export type Status = 'in' | 'possible' | 'out';
+
+/** One support of an option with what stands under it. */
+export interface Support {
+  readonly chainageM: number;
+  /** Index of the ground stretch it stands on. */
+  readonly stretch: number;
+  readonly kind: 'abutment' | 'pier' | 'pylon' | 'anchor-pier';
+  readonly groundLevelM: number;
+  /** Level of the top of the pier or abutment seat, m. */
+  readonly topLevelM: number;
+  readonly heightM: number;
+  /** Depth of water at ordinary level, m; 0 on land. */
+  readonly waterDepthM: number;
+  readonly permanentKN: number;
+  readonly trafficKN: number;
+  readonly shaft: PierShaft;
+  /** One foundation for each ground class its stretch may turn out to be, with the odds. */
+  readonly foundations: readonly Foundation[];
+}
+
+export interface PierShaft {
+  /** Along and across the road, m. */
+  readonly lengthM: number;
+  readonly widthM: number;
+  readonly columns: number;
+  readonly concreteM3: number;
+  readonly reinforcementKg: number;
+}
+
+export interface Foundation {
+  readonly ground: string;
+  readonly odds: number;
+  readonly kind: 'spread' | 'bored-piles';
+  readonly footing: { readonly lengthM: number; readonly widthM: number; readonly depthM: number; readonly topLevelM: number };
+  readonly piles: { readonly count: number; readonly diameterM: number; readonly lengthM: number; readonly toeLevelM: number } | null;
+  readonly lines: readonly MeasuredLine[];
+}
+
+/** Everything worked out for one option before prices are drawn. */
+export interface WorkedOption {
+  readonly number: number;
+  readonly form: FormId;
+  readonly family: Family;
+  readonly method: MethodId;
+  readonly units: readonly Unit[];
+  /** One design per unit, in order. */
+  readonly designs: readonly Design[];
+  readonly depthM: DepthPair;
+  readonly profile: RoadProfile;
+  readonly supports: readonly Support[];
+  /** All measured lines except the foundations that depend on the ground class. */
+  readonly lines: readonly MeasuredLine[];
+  /** Months, low, likely, high. */
+  readonly months: Spread;
+}
+
+export interface AppraisedOption extends WorkedOption {
+  readonly status: Status;
+  readonly rulings: readonly Ruling[];
+  readonly quantities: Quantities;
+  readonly perM2: Quantities;
+  readonly deckAreaM2: number;
+  readonly cost: Spread;
+  readonly quartiles: readonly [q1: number, q3: number];
+  readonly pricePerM2: { readonly withApproaches: number; readonly withoutApproaches: number };
+  readonly parts: readonly { readonly part: BillPart; readonly p50: number }[];
+  readonly limitingCheck: { readonly id: string; readonly label: string; readonly utilisation: number };
+}
+
+/** Where the options stand on cost. */
+export interface Standing {
+  /** Number of the option that leads, or null when none may. */
+  readonly leader: number | null;
+  /** Maximal runs in P50 order in which no pair can be separated. */
+  readonly groups: readonly (readonly number[])[];
+  /** odds[a][b] = share of draws in which option a is cheaper than option b. */
+  readonly odds: Readonly<Record<number, Readonly<Record<number, number>>>>;
+  /** Share of draws within the budget, by option; empty without a budget. */
+  readonly within: Readonly<Record<number, number>>;
+  readonly because: readonly string[];
+}
+
+export interface Appraisal {
+  readonly study: { readonly title: string; readonly version: number; readonly fingerprint: string };
+  readonly site: Site;
+  readonly options: readonly AppraisedOption[];
+  readonly currency: string;
+  readonly dropped: readonly Dropped[];
+  readonly droppedCounts: readonly DroppedCount[];
+  readonly standing: Standing;
+}

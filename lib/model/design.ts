@@ -1,0 +1,121 @@
+import type { BillPart, FormId, MethodId, StandardId } from './ids.ts';
+import type { DeckSpec } from './site.ts';
+
+/** What a form is asked to size: one unit of a crossing (or one bench case), without any knowledge of the site. */
+export interface UnitTask {
+  readonly form: FormId;
+  /** Spans, m. */
+  readonly spansM: readonly number[];
+  readonly deck: DeckSpec;
+  readonly standard: StandardId;
+  /** Plan radius, m; Infinity on a straight. */
+  readonly planRadiusM: number;
+  readonly method: MethodId;
+  /** Structural depth at midspan, m. */
+  readonly depthM: number;
+  /** Number of girders, where the form lets it be chosen. */
+  readonly girders?: number;
+  /** Cable-stayed: which supports (0-based) carry pylons. */
+  readonly pylons?: readonly number[];
+  /** Height of the road above ground at each support, m, where known (pylon legs, falsework). */
+  readonly clearUnderM?: readonly number[];
+}
+
+/** Structural depth of a unit, m: soffit to top of structural slab or plate. */
+export interface DepthPair {
+  readonly support: number;
+  readonly midspan: number;
+}
+
+/** One limit state. */
+export interface Check {
+  readonly id: string;
+  /** Plain words, e.g. 'bending at the piers'. */
+  readonly label: string;
+  readonly demand: number;
+  readonly capacity: number;
+  readonly unit: string;
+  /** demand / capacity. */
+  readonly utilisation: number;
+}
+
+export type Material = 'concrete' | 'steel' | 'strand' | 'stay' | 'surfacing';
+
+/**
+ * Form-free geometry. Points are [x, z] in metres. In elevation x runs along the unit from its first support
+ * and z is height above the top of the structural slab on the road line (down is negative); in section x runs
+ * across the deck from its middle and z the same.
+ */
+export interface Shape {
+  readonly part: string;
+  readonly material: Material;
+  readonly kind: 'polygon' | 'line';
+  readonly points: readonly (readonly [x: number, z: number])[];
+  /** Holes of a polygon (voids of a box). */
+  readonly holes?: readonly (readonly (readonly [x: number, z: number])[])[];
+  /** Thickness of a line (member, stay, plate), m. */
+  readonly thicknessM?: number;
+  /** Drawn behind the rest: stiffeners, joints, hidden lines. */
+  readonly faint?: boolean;
+}
+
+export interface SectionCut {
+  /** Where it is cut, e.g. 'midspan', 'pier'. */
+  readonly at: string;
+  readonly xM: number;
+  readonly shapes: readonly Shape[];
+}
+
+/** Characteristic vertical reactions at one support of a unit, kN, whole deck width. */
+export interface SupportReaction {
+  readonly permanentKN: number;
+  readonly trafficMaxKN: number;
+  /** Least traffic reaction (negative = uplift). */
+  readonly trafficMinKN: number;
+}
+
+/** A sized unit. */
+export interface Design {
+  readonly task: UnitTask;
+  readonly depthM: DepthPair;
+  /** Structural depth along the unit: x from the first support, m, and depth, m. */
+  readonly depthAlong: { readonly xM: readonly number[]; readonly depthM: readonly number[] };
+  readonly elevation: readonly Shape[];
+  readonly sections: readonly SectionCut[];
+  readonly reactions: readonly SupportReaction[];
+  readonly checks: readonly Check[];
+  /** The check with the highest utilisation. */
+  readonly limitingCheck: Check;
+  /** Self-weight part of the governing characteristic moment or force, 0 to 1. */
+  readonly ownWeightShare: number;
+  /** Measured lines of the superstructure, of pylons and anchorages where the form has them, and of its temporary works. */
+  readonly lines: readonly MeasuredLine[];
+  /** Longest and heaviest piece to be brought to site, m and t; null where cast in place. */
+  readonly heaviestPiece: { readonly lengthM: number; readonly massT: number } | null;
+  readonly warnings: readonly string[];
+  /** Named figures of the section and statics for tables and tests (inertia, moments, plate sizes ...), unit in the name. */
+  readonly figures: Readonly<Record<string, number>>;
+}
+
+/** One measured line of the take-off. `item` is a key of `data/rates/items.json`. */
+export interface MeasuredLine {
+  readonly part: BillPart;
+  readonly item: string;
+  readonly quantity: number;
+  /** What was measured, e.g. 'bottom flanges', 'pier 2 shaft'. */
+  readonly what: string;
+  /** How, e.g. '2 girders, 48 plates, 7850 kg/m3'. */
+  readonly how: string;
+  /** Index of the support along the crossing it belongs to, where it belongs to one. */
+  readonly support?: number;
+}
+
+/** Materials of an option or a superstructure; absent materials are 0. */
+export interface Quantities {
+  readonly concreteM3: number;
+  readonly reinforcementKg: number;
+  readonly prestressKg: number;
+  readonly structuralSteelKg: number;
+  readonly stayCableKg: number;
+  readonly mainCableKg: number;
+}

@@ -1,0 +1,55 @@
+/** Identifiers shared by every stage. */
+
+/** Families of structural forms, in the order in which they are listed everywhere. */
+export const families = ['slab', 'girder', 'box', 'truss', 'arch', 'cable-supported'] as const;
+export type Family = (typeof families)[number];
+
+/** Structural forms the tool knows by name; `lib/forms/index.ts` lists those it can size. */
+export const formIds = [
+  'slab',
+  'portal-frame',
+  'precast-i',
+  'precast-trough',
+  'adjacent-box',
+  'half-through',
+  'composite-i',
+  'composite-box',
+  'concrete-box',
+  'cantilever-box',
+  'steel-box',
+  'truss',
+  'tied-arch',
+  'deck-arch',
+  'extradosed',
+  'cable-stayed',
+  'suspension',
+] as const;
+export type FormId = (typeof formIds)[number];
+
+/** Methods of construction. */
+export const methodIds = ['crane', 'falsework', 'launch', 'float-in', 'stay-cantilever'] as const;
+export type MethodId = (typeof methodIds)[number];
+
+/** Traffic load standards. Each is a data file in `data/standards`. */
+export const standardIds = ['lm1', 'hl93'] as const;
+export type StandardId = (typeof standardIds)[number];
+
+/** Ground classes; each has its own foundation. */
+export const groundClassIds = ['rock', 'gravel', 'stiff-clay', 'soft-clay'] as const;
+export type GroundClassId = (typeof groundClassIds)[number];
+
+/** Parts of the crossing under which the bill is drawn up, in the order of the bill. */
+export const billParts = [
+  'deck',
+  'bearings-joints',
+  'pylons',
+  'piers',
+  'foundations',
+  'abutments',
+  'approaches',
+  'river-works',
+  'temporary-works',
+  'traffic-management',
+  'preliminaries',
+] as const;
+export type BillPart = (typeof billParts)[number];

@@ -1,0 +1,41 @@
+import type { FormId, MethodId } from './ids.ts';
+import type { Unit } from './study.ts';
+
+/** An option: form, arrangement, depth and method of construction. */
+export interface Option {
+  readonly number: number;
+  readonly form: FormId;
+  readonly method: MethodId;
+  readonly units: readonly Unit[];
+  /** Structural depth at midspan of the main unit, m; null until it has been found. */
+  readonly depthM: number | null;
+  readonly origin: 'proposed' | 'kept';
+}
+
+/** An arrangement as the search returns it. */
+export interface Arrangement {
+  readonly form: FormId;
+  readonly method: MethodId;
+  readonly units: readonly Unit[];
+  /** Estimated cost on the cost table, money: for ordering only. */
+  readonly tableCost: number;
+}
+
+/** Arrangements not kept, counted by reason. */
+export interface DroppedCount {
+  readonly form: FormId;
+  readonly reason: string;
+  readonly count: number;
+}
+
+/** What the search knows of cost: made by `appraise` from the real stages, never by `arrange`. */
+export interface CostTable {
+  /** Deck cost, money per m of deck, of one span of this form when the governing span of its unit is `governingM`. */
+  deckPerM(form: FormId, spanM: number, governingM: number): number;
+  /** Structural depth at midspan, m, for a governing span. */
+  depthM(form: FormId, governingM: number): number;
+  /** Fixed cost of a unit of this form (pylons, mobilisation of its method), money. */
+  unitFixed(form: FormId, governingM: number): number;
+  /** Cost of one intermediate support with its foundation, bearings included, money. */
+  support(form: FormId, chainageM: number, spanLeftM: number, spanRightM: number): number;
+}

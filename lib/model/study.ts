@@ -1,0 +1,230 @@
+import type { FormId, GroundClassId, MethodId, StandardId } from './ids.ts';
+
+/**
+ * The study after reading: every default has been applied once, everything is in metres, kilonewtons and
+ * money of the study's currency, and `'unknown'` is a legal answer wherever the type allows it.
+ * The file format and its checks live in `lib/study`.
+ */
+export interface Study {
+  readonly format: 'spanledger-study';
+  readonly version: number;
+  readonly title: string;
+  readonly reference: string;
+  /** Shown wherever the study is shown, e.g. that a worked example is invented. */
+  readonly notice: string;
+  readonly brief: Brief;
+  readonly books: Books;
+  readonly options: OptionsSlice;
+  readonly priorities: Priorities;
+  readonly notes: readonly Note[];
+  readonly decision: Decision | null;
+}
+
+export type Unknown = 'unknown';
+
+export interface Brief {
+  readonly crossing: Crossing;
+  readonly road: Road;
+  readonly deck: readonly DeckStrip[];
+  /** Surfacing thickness, m. */
+  readonly surfacingM: number;
+  readonly loading: StandardId;
+  readonly obstacles: readonly Obstacle[];
+  readonly waters: readonly Water[];
+  readonly groundStretches: readonly GroundStretch[];
+  readonly access: Access;
+  readonly budget: Budget | Unknown;
+}
+
+export interface Crossing {
+  /** Chainages of the two abutment bearing lines, m; start < end. */
+  readonly startM: number;
+  readonly endM: number;
+  /** Ground and bed levels along the centre line; chainages rise; covers start to end. */
+  readonly ground: readonly ProfilePoint[];
+  readonly planRadiusM: number | 'straight' | Unknown;
+  /** Skew of the supports from square, degrees, 0 = square. */
+  readonly skewDeg: number | Unknown;
+}
+
+export interface ProfilePoint {
+  readonly chainageM: number;
+  readonly levelM: number;
+}
+
+export interface Road {
+  /** Proposed finished road levels at the two abutment bearing lines, m. */
+  readonly startLevelM: number;
+  readonly endLevelM: number;
+  /** Which ends of the road are tied to something that cannot move. */
+  readonly fixedEnd: 'start' | 'end' | 'both' | 'none';
+  /** How far a free end may rise above its proposed level, m. */
+  readonly mayRiseM: number;
+  /** Steepest gradient allowed, as a ratio (0.06 = 6 %). */
+  readonly maxGradient: number;
+  /** Side slope of approach fill, horizontal to vertical. */
+  readonly fillSideSlope: number;
+}
+
+export const stripKinds = ['lane', 'shoulder', 'verge', 'footway', 'barrier', 'parapet'] as const;
+export type StripKind = (typeof stripKinds)[number];
+
+/** One strip of the deck, left to right looking up-chainage. */
+export interface DeckStrip {
+  readonly kind: StripKind;
+  readonly widthM: number;
+  /** Width in the ultimate layout, m; equal to `widthM` unless given. */
+  readonly ultimateWidthM: number;
+}
+
+export const obstacleKinds = ['river', 'railway', 'road', 'bank', 'utility', 'heritage'] as const;
+export type ObstacleKind = (typeof obstacleKinds)[number];
+
+export interface Obstacle {
+  readonly kind: ObstacleKind;
+  readonly name: string;
+  /** Stretch of the crossing it occupies, chainages, m. */
+  readonly fromM: number;
+  readonly toM: number;
+  /** `hard`: no support may stand here, ever. `soft`: one may, at a price or with a caution. `none`: free. */
+  readonly supports: 'hard' | 'soft' | 'none';
+  /** Envelope to be kept free above it, or null where there is none. */
+  readonly clearance: Clearance | null;
+}
+
+export interface Clearance {
+  readonly fromM: number;
+  readonly toM: number;
+  /** Level the headroom is measured from (rail, road, water), m. */
+  readonly datumLevelM: number;
+  readonly headroomM: number;
+  /** True once the authority has confirmed it; a preset otherwise. */
+  readonly confirmed: boolean;
+}
+
+export interface Water {
+  readonly name: string;
+  readonly fromM: number;
+  readonly toM: number;
+  /** Ordinary water level, m. */
+  readonly levelM: number;
+  /** Design flood level, m, or unknown. */
+  readonly floodLevelM: number | Unknown;
+  readonly floodReturnYears: number | Unknown;
+  /** Clear height from flood level to soffit, m. */
+  readonly freeboardM: number;
+  /** Flood plain: stretch over which the flood level and freeboard apply. */
+  readonly floodFromM: number;
+  readonly floodToM: number;
+}
+
+/** Ground along a stretch of the crossing. Odds sum to 1; a stretch of unknown ground carries preset odds. */
+export interface GroundStretch {
+  readonly fromM: number;
+  readonly toM: number;
+  readonly known: boolean;
+  readonly classes: readonly GroundOdds[];
+}
+
+export interface GroundOdds {
+  readonly ground: GroundClassId;
+  /** Level of the bearing stratum (rock head, dense gravel, stiff clay), m. */
+  readonly bearingLevelM: number;
+  readonly odds: number;
+}
+
+export interface Access {
+  /** Longest piece and heaviest piece that can be brought to site, m and t. */
+  readonly haulLengthM: number | Unknown;
+  readonly haulMassT: number | Unknown;
+  readonly crane: boolean | Unknown;
+  readonly barge: boolean | Unknown;
+}
+
+export interface Budget {
+  /** Money of the study's currency. */
+  readonly amount: number;
+  /** Price date, e.g. '2026 Q1'. */
+  readonly priceDate: string;
+  readonly includes: string;
+}
+
+/** What the study takes from the shelf: rates, factors, house rules. */
+export interface Books {
+  readonly currency: string;
+  /** Name of the rate pack in `data/rates`. */
+  readonly ratePack: string;
+  /** Rates typed over the pack's, by item; each with its reason. */
+  readonly rates: readonly RateOverride[];
+  /** Draws and seed of the cost simulation. */
+  readonly draws: number;
+  readonly seed: number;
+  /** Odds between which two options cannot be separated, e.g. 0.2 to 0.8. */
+  readonly unseparated: readonly [low: number, high: number];
+}
+
+export interface RateOverride {
+  readonly item: string;
+  readonly p10: number;
+  readonly p50: number;
+  readonly p90: number;
+  readonly reason: string;
+}
+
+/** Options as the study stores them. */
+export interface OptionsSlice {
+  /** Forms asked for; an empty list asks for every form the tool can size. */
+  readonly forms: readonly FormId[];
+  /** Forms worked out even where a rule puts them out. */
+  readonly workOutAnyway: readonly FormId[];
+  /** Numbers given so far. A number is never given twice. */
+  readonly register: readonly RegisterEntry[];
+  /** Options frozen by hand. */
+  readonly kept: readonly KeptOption[];
+  /** View setting: the option others are compared with, or null. */
+  readonly reference: number | null;
+}
+
+export interface RegisterEntry {
+  readonly number: number;
+  readonly form: FormId;
+  readonly method: MethodId;
+  /** Number of supports, abutments included. */
+  readonly supports: number;
+}
+
+/** A stretch of the crossing with one form, from support to support. */
+export interface Unit {
+  readonly form: FormId;
+  readonly role: 'main' | 'approach';
+  /** Chainages of its supports, m, rising; at least two. */
+  readonly supportsM: readonly number[];
+}
+
+export interface KeptOption {
+  readonly number: number;
+  readonly form: FormId;
+  readonly method: MethodId;
+  readonly units: readonly Unit[];
+  /** Structural depth at midspan of the main unit, m; null = least crossing cost. */
+  readonly depthM: number | null;
+}
+
+/** Empty until the deciding pages are built; kept in the file so that nothing is lost. */
+export interface Priorities {
+  readonly weights: Readonly<Record<string, number>>;
+}
+
+export interface Note {
+  readonly about: string;
+  readonly text: string;
+  readonly author: string;
+  readonly date: string;
+}
+
+export interface Decision {
+  readonly option: number;
+  readonly reasons: readonly string[];
+  readonly author: string;
+  readonly date: string;
+}
