@@ -1,5 +1,6 @@
 import { readdirSync } from 'node:fs';
 import { resolve } from 'node:path';
+import type { Plugin } from 'vite';
 import { defineConfig } from 'vitest/config';
 
 const root = import.meta.dirname;
@@ -7,24 +8,62 @@ const pages = readdirSync(resolve(root, 'notebooks'))
   .filter((name) => name.endsWith('.html'))
   .map((name) => resolve(root, 'notebooks', name));
 
+/** Nothing from elsewhere, nothing evaluated, no inline style: the built pages work offline and cannot be talked into loading anything. */
+const contentPolicy: Plugin = {
+  name: 'content-policy',
+  apply: 'build',
+  transformIndexHtml: () => [
+    {
+      tag: 'meta',
+      injectTo: 'head-prepend',
+      attrs: {
+        'http-equiv': 'Content-Security-Policy',
+        content:
+          "default-src 'none'; script-src 'self'; style-src 'self'; font-src 'self'; img-src 'self' data: blob:; worker-src 'self'; connect-src 'self'; base-uri 'none'; form-action 'none'",
+      },
+    },
+  ],
+};
+
 export default defineConfig({
   root: resolve(root, 'notebooks'),
   base: './',
   publicDir: false,
+  plugins: [contentPolicy],
   build: {
     outDir: resolve(root, 'dist'),
     emptyOutDir: true,
     target: 'es2022',
+    assetsInlineLimit: 0,
+    modulePreload: { polyfill: false },
     rolldownOptions: { input: pages },
   },
   worker: { format: 'es' },
   server: { fs: { allow: [root] } },
   test: {
     root,
-    include: ['test/**/*.test.ts'],
-    exclude: ['test/browser/**', 'node_modules/**'],
-    isolate: false,
-    setupFiles: ['test/setup.ts'],
     benchmark: { include: ['test/bench/**/*.bench.ts'] },
+    projects: [
+      {
+        test: {
+          name: 'unit',
+          root,
+          include: ['test/**/*.test.ts'],
+          exclude: ['test/browser/**'],
+          isolate: false,
+          setupFiles: ['test/setup.ts'],
+        },
+      },
+      {
+        test: {
+          name: 'browser',
+          root,
+          include: ['test/browser/**/*.test.ts'],
+          fileParallelism: false,
+          testTimeout: 60_000,
+          hookTimeout: 60_000,
+        },
+      },
+    ],
   },
 });
