@@ -29,8 +29,26 @@ export interface Support {
   readonly permanentKN: number;
   readonly trafficKN: number;
   readonly shaft: PierShaft;
+  readonly articulation: Articulation;
+  /** Measured lines of the support above its foundation: bearings, joint, shaft or abutment walls, tie-downs. */
+  readonly lines: readonly MeasuredLine[];
   /** One foundation for each ground class its stretch may turn out to be, with the odds. */
   readonly foundations: readonly Foundation[];
+}
+
+/** How the deck is held at a support. Forces are characteristic, kN, at bearing level. */
+export interface Articulation {
+  /** The deck's fixed point along the road, for at least one of the units that meet here. */
+  readonly fixed: boolean;
+  readonly bearings: number;
+  /** Design vertical load of all bearings together, MN. */
+  readonly bearingMN: number;
+  readonly alongKN: number;
+  readonly acrossKN: number;
+  /** Movement of the expansion joint here, mm; 0 where the deck is continuous. */
+  readonly jointMovementMm: number;
+  /** Design uplift taken by a tie-down, kN; 0 where there is none. */
+  readonly tieDownKN: number;
 }
 
 export interface PierShaft {

@@ -108,6 +108,8 @@ export interface MeasuredLine {
   readonly how: string;
   /** Index of the support along the crossing it belongs to, where it belongs to one. */
   readonly support?: number;
+  /** Index of the unit whose design it came from; set by the take-off, absent on lines of the supports and the crossing. */
+  readonly unit?: number;
 }
 
 /** Materials of an option or a superstructure; absent materials are 0. */
