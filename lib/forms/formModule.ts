@@ -1,21 +1,6 @@
-import type { Design, Family, FormId, MethodId, UnitTask } from '../model/index.ts';
+import type { Design, Family, FormId, MethodId, Pattern, UnitTask } from '../model/index.ts';
 
-/** How the spans of a form may be laid out. Windows (ratios, span bands) are rules and live in `data/rules`. */
-export type Pattern =
-  /** One continuous unit, abutment to abutment. */
-  | { readonly kind: 'continuous' }
-  /** A main unit of one simple span over the obstacle; approach units of another form on either side where needed. */
-  | { readonly kind: 'simple-main'; readonly approach: FormId }
-  /**
-   * A main unit hung from one or two pylons; approach units where needed.
-   * `sideRatio` is the side span over the main span that the form is laid out with for each pylon count.
-   */
-  | {
-      readonly kind: 'pylon';
-      readonly approach: FormId;
-      readonly onePylonBack: readonly [least: number, most: number];
-      readonly twoPylonSide: readonly [least: number, most: number];
-    };
+export type { Pattern } from '../model/index.ts';
 
 /** A structural form. `lib/forms/index.ts` is the registry. */
 export interface FormModule {

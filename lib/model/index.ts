@@ -1,4 +1,5 @@
 export * from './ids.ts';
+export * from './pattern.ts';
 export * from './study.ts';
 export * from './site.ts';
 export * from './design.ts';

@@ -199,6 +199,8 @@ export interface Unit {
   readonly role: 'main' | 'approach';
   /** Chainages of its supports, m, rising; at least two. */
   readonly supportsM: readonly number[];
+  /** Units hung from pylons: which of its supports (0-based) carry them. Absent elsewhere. */
+  readonly pylons?: readonly number[];
 }
 
 export interface KeptOption {

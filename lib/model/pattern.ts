@@ -1,0 +1,18 @@
+import type { FormId } from './ids.ts';
+
+/** How the spans of a form may be laid out. Windows (ratios, span bands) are rules and live in `data/rules`. */
+export type Pattern =
+  /** One continuous unit, abutment to abutment. */
+  | { readonly kind: 'continuous' }
+  /** A main unit of one simple span over the obstacle; approach units of another form on either side where needed. */
+  | { readonly kind: 'simple-main'; readonly approach: FormId }
+  /**
+   * A main unit hung from one or two pylons; approach units where needed.
+   * `onePylonBack` and `twoPylonSide` are the back or side span over the main span that the form is laid out with.
+   */
+  | {
+      readonly kind: 'pylon';
+      readonly approach: FormId;
+      readonly onePylonBack: readonly [least: number, most: number];
+      readonly twoPylonSide: readonly [least: number, most: number];
+    };
