@@ -1,0 +1,1 @@
+export type { ArrangeRequest, ArrangeResult, Relaxation, Windows } from './request.ts';

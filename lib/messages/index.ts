@@ -1,0 +1,1 @@
+export { placeOf, remedyFor, sentence, sentences } from './messages.ts';

@@ -1,0 +1,53 @@
+import type { Site, SoffitLimit } from '../model/index.ts';
+
+/** Ground or bed level at a chainage, m: straight between the surveyed points, level beyond the first and last. */
+export function groundAt(site: Site, chainageM: number): number {
+  const { groundX, groundZ } = site;
+  const n = groundX.length;
+  if (chainageM <= groundX[0]!) return groundZ[0]!;
+  if (chainageM >= groundX[n - 1]!) return groundZ[n - 1]!;
+  let low = 0;
+  let high = n - 1;
+  while (high - low > 1) {
+    const middle = (low + high) >> 1;
+    if (groundX[middle]! <= chainageM) low = middle;
+    else high = middle;
+  }
+  const share = (chainageM - groundX[low]!) / (groundX[high]! - groundX[low]!);
+  return groundZ[low]! + share * (groundZ[high]! - groundZ[low]!);
+}
+
+/** Depth of water at ordinary level at a chainage, m; 0 on land. */
+export function waterDepthAt(site: Site, chainageM: number): number {
+  let depth = 0;
+  for (const water of site.waters) {
+    if (chainageM >= water.fromM && chainageM <= water.toM) {
+      depth = Math.max(depth, water.levelM - groundAt(site, chainageM));
+    }
+  }
+  return depth;
+}
+
+/** Index of the ground stretch a chainage lies in, or of the nearest one; -1 when the site has none. */
+export function stretchAt(site: Site, chainageM: number): number {
+  let nearest = -1;
+  let least = Infinity;
+  site.groundStretches.forEach((stretch, index) => {
+    const away = Math.max(stretch.fromM - chainageM, chainageM - stretch.toM, 0);
+    if (away < least) {
+      least = away;
+      nearest = index;
+    }
+  });
+  return nearest;
+}
+
+/** The highest of the lowest-soffit limits at a chainage, or null where nothing has to be kept clear. */
+export function soffitLimitAt(site: Site, chainageM: number): SoffitLimit | null {
+  let governing: SoffitLimit | null = null;
+  for (const limit of site.soffitLimits) {
+    if (chainageM < limit.fromM || chainageM > limit.toM) continue;
+    if (governing === null || limit.levelM > governing.levelM) governing = limit;
+  }
+  return governing;
+}

@@ -1,0 +1,94 @@
+import type { Brief, Obstacle, Site, SoffitLimit, Water, WaterBody, Zone } from '../model/index.ts';
+import { deckSpec } from './deckSpec.ts';
+
+function zoneOf(obstacle: Obstacle): Zone[] {
+  if (obstacle.supports === 'none') return [];
+  const { fromM, toM, kind, name } = obstacle;
+  return [{ fromM, toM, kind, name, hard: obstacle.supports === 'hard' }];
+}
+
+function clearanceLimit(obstacle: Obstacle): SoffitLimit[] {
+  const clearance = obstacle.clearance;
+  if (clearance === null) return [];
+  return [
+    {
+      fromM: clearance.fromM,
+      toM: clearance.toM,
+      levelM: clearance.datumLevelM + clearance.headroomM,
+      reason: obstacle.name,
+      kind: obstacle.kind,
+    },
+  ];
+}
+
+/** A flood level that is not known cannot be kept clear of: the ordinary level stands in, over the same stretch. */
+function floodLimit(water: Water): SoffitLimit {
+  const known = water.floodLevelM !== 'unknown';
+  return {
+    fromM: water.floodFromM,
+    toM: water.floodToM,
+    levelM: (water.floodLevelM === 'unknown' ? water.levelM : water.floodLevelM) + water.freeboardM,
+    reason: known
+      ? `${water.name}, flood level and freeboard`
+      : `${water.name}, ordinary level and freeboard, flood level unknown`,
+    kind: 'flood',
+  };
+}
+
+function bodyOf(water: Water): WaterBody {
+  const { name, fromM, toM, levelM } = water;
+  return {
+    name,
+    fromM,
+    toM,
+    levelM,
+    floodLevelM: water.floodLevelM === 'unknown' ? null : water.floodLevelM,
+  };
+}
+
+/** Widest stretch inside the crossing that no support may stand in, overlapping hard zones taken together. */
+function widestBarred(zones: readonly Zone[], startM: number, endM: number): Site['mainOpening'] {
+  const hard = zones
+    .filter((zone) => zone.hard && zone.toM > startM && zone.fromM < endM)
+    .map((zone) => ({ fromM: Math.max(zone.fromM, startM), toM: Math.min(zone.toM, endM) }))
+    .sort((a, b) => a.fromM - b.fromM);
+  const joined: { fromM: number; toM: number }[] = [];
+  for (const zone of hard) {
+    const last = joined.at(-1);
+    if (last !== undefined && zone.fromM <= last.toM) last.toM = Math.max(last.toM, zone.toM);
+    else joined.push({ ...zone });
+  }
+  let widest: Site['mainOpening'] = null;
+  for (const { fromM, toM } of joined) {
+    const widthM = toM - fromM;
+    if (widest === null || widthM > widest.widthM + 1e-9) widest = { fromM, toM, widthM };
+  }
+  return widest;
+}
+
+/**
+ * Turns a checked brief into the site as the later stages read it: barred stretches, lowest allowed soffits, water,
+ * ground and the deck, all in metres and plain data. The brief has been checked by `readStudy`; nothing throws here.
+ */
+export function survey(brief: Brief): Site {
+  const { crossing, obstacles } = brief;
+  const zones = obstacles.flatMap(zoneOf);
+  const radius = crossing.planRadiusM;
+  return {
+    startM: crossing.startM,
+    endM: crossing.endM,
+    lengthM: crossing.endM - crossing.startM,
+    groundX: crossing.ground.map((point) => point.chainageM),
+    groundZ: crossing.ground.map((point) => point.levelM),
+    zones,
+    soffitLimits: [...obstacles.flatMap(clearanceLimit), ...brief.waters.map(floodLimit)],
+    waters: brief.waters.map(bodyOf),
+    groundStretches: brief.groundStretches,
+    road: brief.road,
+    deck: deckSpec(brief.deck, brief.surfacingM, brief.loading),
+    standard: brief.loading,
+    planRadiusM: radius === 'unknown' ? null : radius === 'straight' ? Infinity : radius,
+    skewDeg: crossing.skewDeg === 'unknown' ? null : crossing.skewDeg,
+    mainOpening: widestBarred(zones, crossing.startM, crossing.endM),
+  };
+}

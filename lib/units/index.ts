@@ -1,0 +1,1 @@
+export * from './units.ts';
