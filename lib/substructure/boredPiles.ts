@@ -1,0 +1,135 @@
+import type { FootTask } from './foot.ts';
+import { demandAt } from './foot.ts';
+import type { GroundFigures } from './data.ts';
+import { substructureData } from './data.ts';
+
+/** A capped group of bored piles. */
+export interface PileGroup {
+  readonly rowsAlong: number;
+  readonly rowsAcross: number;
+  readonly diameterM: number;
+  /** From the underside of the cap to the toe, m. */
+  readonly lengthM: number;
+  readonly toeLevelM: number;
+  readonly cap: { readonly lengthM: number; readonly widthM: number; readonly depthM: number };
+}
+
+/** Levels that bound the piles, m. */
+export interface PileLevels {
+  /** Top of the cap. */
+  readonly capTopM: number;
+  readonly bearingLevelM: number;
+  /** Bed level after scour: no shaft friction is counted above it. */
+  readonly scouredLevelM: number;
+}
+
+/**
+ * Allowable load of one pile, kN: (shaft friction x perimeter x length in the bearing stratum + base x area) / safety,
+ * within the mean stress of the concrete. `inStratumM` is the length below both bearing level and scour, m.
+ */
+export function pileCapacity(ground: GroundFigures, diameterM: number, inStratumM: number): number {
+  const { safety, concreteMPa } = substructureData.piles;
+  const area = (Math.PI * diameterM * diameterM) / 4;
+  const soil = (ground.shaftKPa * Math.PI * diameterM * inStratumM + ground.baseKPa * area) / safety;
+  return Math.min(soil, concreteMPa * 1000 * area);
+}
+
+/**
+ * The group with the least concrete in piles and cap: diameters and rows are tried in turn; loads on the corner piles come
+ * from V / n with the moments on the pile grid; the length in the bearing stratum is what the corner pile needs.
+ * Null when no group carries the loads (the ground or the loads are outside the tool's range).
+ */
+export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLevels): PileGroup | null {
+  const { piles } = substructureData;
+  let best: PileGroup | null = null;
+  let least = Infinity;
+  const wall = task.backfill !== null;
+  for (let k = 0; k < piles.diametersM.length; k++) {
+    const diameterM = piles.diametersM[k]!;
+    const lateralKN = piles.lateralKN[k]!;
+    const spacing = piles.spacing * diameterM;
+    for (let rowsAlong = 2; rowsAlong <= 5; rowsAlong++) {
+      for (let rowsAcross = 2; rowsAcross <= 12; rowsAcross++) {
+        const lengthM = Math.max(
+          (rowsAlong - 1) * spacing + 2 * diameterM,
+          task.shaftLengthM + diameterM / 2,
+        );
+        const widthM = Math.max(
+          (rowsAcross - 1) * spacing + 2 * diameterM,
+          task.shaftWidthM + (wall ? 0 : diameterM / 2),
+        );
+        const depthM = Math.max(piles.leastCapDepthM, piles.capDepthDiameters * diameterM);
+        const capVolume = lengthM * widthM * depthM;
+        if (capVolume > least) break;
+        const undersideM = levels.capTopM - depthM;
+        const need = stratumLength(task, ground, {
+          diameterM,
+          lateralKN,
+          spacing,
+          rowsAlong,
+          rowsAcross,
+          lengthM,
+          widthM,
+          depthM,
+          undersideM,
+        });
+        if (need === null) continue;
+        const startM = Math.min(levels.bearingLevelM, levels.scouredLevelM, undersideM);
+        const toeLevelM = startM - need;
+        const pileLength = undersideM - toeLevelM;
+        const volume =
+          capVolume + (rowsAlong * rowsAcross * pileLength * Math.PI * diameterM * diameterM) / 4;
+        if (volume < least) {
+          least = volume;
+          best = {
+            rowsAlong,
+            rowsAcross,
+            diameterM,
+            lengthM: pileLength,
+            toeLevelM,
+            cap: { lengthM, widthM, depthM },
+          };
+        }
+      }
+    }
+  }
+  return best;
+}
+
+interface Trial {
+  readonly diameterM: number;
+  readonly lateralKN: number;
+  readonly spacing: number;
+  readonly rowsAlong: number;
+  readonly rowsAcross: number;
+  readonly lengthM: number;
+  readonly widthM: number;
+  readonly depthM: number;
+  readonly undersideM: number;
+}
+
+/** Length in the bearing stratum that the worst pile of a trial group needs, m; null when the group fails. */
+function stratumLength(task: FootTask, ground: GroundFigures, trial: Trial): number | null {
+  const { piles } = substructureData;
+  const { diameterM: d, rowsAlong, rowsAcross, spacing } = trial;
+  const n = rowsAlong * rowsAcross;
+  const area = (Math.PI * d * d) / 4;
+  const perimeter = Math.PI * d;
+  // Corner pile: M y / sum(y2) of a grid of r rows at spacing s is M * 6 / (n s (r + 1)).
+  const perMomentAlong = 6 / (n * spacing * (rowsAlong + 1));
+  const perMomentAcross = 6 / (n * spacing * (rowsAcross + 1));
+  let inStratum = ground.socketDiameters * d;
+  for (const combo of task.combos) {
+    const load = demandAt(task, combo, trial.lengthM, trial.widthM, trial.depthM, trial.undersideM);
+    if (Math.hypot(load.alongKN, load.acrossKN) > n * trial.lateralKN * combo.capacity) return null;
+    const swing =
+      Math.abs(load.momentAlongKNm) * perMomentAlong + Math.abs(load.momentAcrossKNm) * perMomentAcross;
+    const most = (load.verticalKN / n + swing) / combo.capacity;
+    const least = (load.verticalKN / n - swing) / combo.capacity;
+    if (most > piles.concreteMPa * 1000 * area) return null;
+    const forLoad = (most * piles.safety - ground.baseKPa * area) / (ground.shaftKPa * perimeter);
+    const forUplift = (-least * piles.safety) / (piles.tensionShare * ground.shaftKPa * perimeter);
+    inStratum = Math.max(inStratum, forLoad, forUplift);
+  }
+  return inStratum > piles.longestInStratumM ? null : inStratum;
+}

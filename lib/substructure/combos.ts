@@ -1,0 +1,42 @@
+/**
+ * One combination of characteristic loads at a support. Forces in kN; a horizontal force acts at its own level, m.
+ * `along` is positive towards the span for an abutment and has no sign for a pier.
+ */
+export interface Combo {
+  readonly verticalKN: number;
+  readonly alongKN: number;
+  readonly alongLevelM: number;
+  readonly acrossKN: number;
+  readonly acrossLevelM: number;
+  /** Factor on allowable ground and pile loads: 1, or more for accidental loads. */
+  readonly capacity: number;
+  /** Factor on the loads for the check of the shaft at the ultimate limit state. */
+  readonly ultimate: number;
+}
+
+/** Soil held behind an abutment; it loads the heel of the footing and pushes towards the span. */
+export interface Backfill {
+  /** Level of the road over it, m. */
+  readonly topLevelM: number;
+  readonly widthM: number;
+}
+
+/** Loads of a combination brought down to one level: V, H and M in kN and kNm. */
+export interface Resultant {
+  readonly verticalKN: number;
+  readonly alongKN: number;
+  readonly acrossKN: number;
+  readonly momentAlongKNm: number;
+  readonly momentAcrossKNm: number;
+}
+
+/** Brings the loads of a combination down to `levelM`. */
+export function resultantAt(combo: Combo, levelM: number): Resultant {
+  return {
+    verticalKN: combo.verticalKN,
+    alongKN: combo.alongKN,
+    acrossKN: combo.acrossKN,
+    momentAlongKNm: combo.alongKN * Math.max(0, combo.alongLevelM - levelM),
+    momentAcrossKNm: combo.acrossKN * Math.max(0, combo.acrossLevelM - levelM),
+  };
+}

@@ -1,0 +1,6 @@
+export { roadLevelAt } from './roadLevelAt.ts';
+export { deckOnSupport, standPierBetween, type DeckOnSupport } from './standPierBetween.ts';
+export { standOneSupport } from './standOneSupport.ts';
+export type { SupportAsk } from './supportAsk.ts';
+export { standSupports } from './standSupports.ts';
+export { expectedLines } from './supportLines.ts';

@@ -1,0 +1,62 @@
+import type { Site } from '../model/index.ts';
+import { groundAt, waterDepthAt } from '../site/index.ts';
+import { substructureData } from './data.ts';
+
+/** What a support meets at one chainage. Levels and depths in metres. */
+export interface Setting {
+  readonly groundLevelM: number;
+  /** Depth of water at ordinary level; 0 on land. */
+  readonly waterDepthM: number;
+  /** Ordinary water level where it can reach an excavation: in the water and on the flood plain; null elsewhere. */
+  readonly waterLevelM: number | null;
+  /** Depth of the flood over the ground; 0 where none reaches. */
+  readonly floodDepthM: number;
+  /** Nearest traffic that could strike a support here, with the force at its height, kN and m; null where none is near. */
+  readonly impact: { readonly forceKN: number; readonly heightM: number } | null;
+}
+
+/**
+ * Reads the site at one chainage.
+ * A flood reaches every place where a flood clearance applies and the ground lies below the flood level, and the
+ * water itself. Impact is the largest force of the roads and railways within reach (EN 1991-1-7, see the data file).
+ */
+export function settingAt(site: Site, chainageM: number): Setting {
+  const groundLevelM = groundAt(site, chainageM);
+  const waterDepthM = Math.max(0, waterDepthAt(site, chainageM));
+  const onPlain = site.soffitLimits.some((limit) => limit.kind === 'flood' && covers(limit, chainageM));
+  let waterLevelM: number | null = waterDepthM > 0 ? groundLevelM + waterDepthM : null;
+  let floodDepthM = waterDepthM;
+  for (const water of site.waters) {
+    const here = covers(water, chainageM);
+    if (!here && !onPlain) continue;
+    if (waterLevelM === null) waterLevelM = water.levelM;
+    if (water.floodLevelM !== null) floodDepthM = Math.max(floodDepthM, water.floodLevelM - groundLevelM);
+  }
+  return { groundLevelM, waterDepthM, waterLevelM, floodDepthM, impact: impactNear(site, chainageM) };
+}
+
+function impactNear(site: Site, chainageM: number): Setting['impact'] {
+  let worst: Setting['impact'] = null;
+  for (const zone of site.zones) {
+    if (zone.kind !== 'road' && zone.kind !== 'railway') continue;
+    const { reachM, forceKN, heightM } = substructureData.impact[zone.kind];
+    if (chainageM < zone.fromM - reachM || chainageM > zone.toM + reachM) continue;
+    if (worst === null || forceKN > worst.forceKN) worst = { forceKN, heightM };
+  }
+  return worst;
+}
+
+const covers = (stretch: { fromM: number; toM: number }, x: number): boolean =>
+  x >= stretch.fromM && x <= stretch.toM;
+
+/**
+ * Depth of scour below the bed or ground, m: general scour plus the local hole at a pier, 1.5 b tanh(y / b) for
+ * flood depth y and pier thickness b across the flow (Breusers, Nicollet and Shen 1977, from memory). 0 where no flood reaches.
+ */
+export function scourDepth(setting: Setting, thicknessM: number): number {
+  if (!(setting.floodDepthM > 0)) return 0;
+  const { generalRiverM, generalPlainM, localFactor } = substructureData.scour;
+  const general = setting.waterDepthM > 0 ? generalRiverM : generalPlainM;
+  const local = thicknessM > 0 ? localFactor * thicknessM * Math.tanh(setting.floodDepthM / thicknessM) : 0;
+  return general + local;
+}

@@ -1,0 +1,97 @@
+import type { Site, Support } from '../model/index.ts';
+import { substructureData } from './data.ts';
+import type { FoundationTask } from './foot.ts';
+import { foundationFor } from './foundationFor.ts';
+import { groundUnder } from './groundUnder.ts';
+import { pierCombos } from './pierCombos.ts';
+import { scourDepth, settingAt } from './setting.ts';
+import { sectionArea, sizeShaft } from './sizeShaft.ts';
+import type { SupportAsk } from './supportAsk.ts';
+import { articulationLines, bearingLoadMN, shaftLines, upliftKN, waterAccessLines } from './supportLines.ts';
+
+/** A pier, anchor pier or pylon foot with one foundation for each ground class of its stretch. */
+export function standPier(site: Site, ask: SupportAsk): Support {
+  const { pier, bearings, concrete, piles, wind } = substructureData;
+  const setting = settingAt(site, ask.chainageM);
+  const topLevelM = ask.soffitLevelM - bearings.heightM;
+  const shaftFootM = setting.groundLevelM - piles.capCoverM;
+  const heightM = Math.max(0, topLevelM - setting.groundLevelM);
+  const shaftHeightM = Math.max(0, topLevelM - shaftFootM);
+  const slim = Math.max(pier.leastLeafM, shaftHeightM / 12);
+  const windKN = wind.pressureKNm2 * slim * heightM;
+  const wet = setting.floodDepthM > 0 || setting.impact !== null;
+  const designMN = bearingLoadMN(ask);
+  const pylon = ask.pylon;
+  const shaft = pylon
+    ? { lengthM: pylon.lengthM, widthM: pylon.widthM, columns: 2, concreteM3: 0, reinforcementKg: 0 }
+    : sizeShaft({
+        heightM: shaftHeightM,
+        footLevelM: shaftFootM,
+        deckWidthM: site.deck.widthM,
+        leaf: wet,
+        combos: pierCombos(ask, setting, topLevelM, {
+          weightKN: 0,
+          windKN,
+          windLevelM: setting.groundLevelM + heightM / 2,
+        }),
+        designVerticalKN: designMN * 1000,
+        permanentKN: ask.permanentKN,
+      });
+  const weightKN = pylon ? pylon.weightKN : shaft.concreteM3 * concrete.weightKNm3;
+  const combos = pierCombos(ask, setting, topLevelM, {
+    weightKN,
+    windKN: pylon ? wind.pressureKNm2 * pylon.lengthM * 2 * pylon.heightM : windKN,
+    windLevelM: setting.groundLevelM + (pylon ? pylon.heightM : heightM) / 2,
+  });
+  const hollow = shaftHeightM > pier.hollowAboveM;
+  const columnWidth = shaft.columns === 2 ? shaft.lengthM : shaft.widthM;
+  const task: FoundationTask = {
+    name: ask.name,
+    ...(ask.index === undefined ? {} : { support: ask.index }),
+    shaftLengthM: shaft.lengthM,
+    shaftWidthM: shaft.widthM,
+    combos,
+    groundLevelM: setting.groundLevelM,
+    waterLevelM: setting.waterLevelM,
+    scourM: scourDepth(setting, shaft.lengthM),
+    backfill: null,
+    shaftFootM,
+    shaftAreaM2: pylon
+      ? 2 * shaft.lengthM * shaft.lengthM
+      : sectionArea(shaft.lengthM, columnWidth, hollow) * shaft.columns,
+    shaftBarsKgM3: shaft.columns === 2 ? pier.columnBarsKgM3 : pier.leafBarsKgM3,
+    shaftItem: pylon ? 'pylon-concrete' : 'pier-concrete',
+  };
+  const ground = groundUnder(site, ask.chainageM);
+  const how =
+    shaft.columns === 2
+      ? `two columns ${shaft.lengthM} m square, ${shaftHeightM.toFixed(1)} m high, with head`
+      : `${hollow ? 'hollow ' : ''}leaf ${shaft.lengthM} x ${shaft.widthM.toFixed(2)} m, ${shaftHeightM.toFixed(1)} m high`;
+  return {
+    chainageM: ask.chainageM,
+    stretch: ground.stretch,
+    kind: ask.kind,
+    groundLevelM: setting.groundLevelM,
+    topLevelM,
+    heightM,
+    waterDepthM: setting.waterDepthM,
+    permanentKN: ask.permanentKN,
+    trafficKN: ask.trafficKN,
+    shaft,
+    articulation: {
+      fixed: ask.fixed,
+      bearings: ask.bearings,
+      bearingMN: designMN,
+      alongKN: ask.alongKN,
+      acrossKN: ask.acrossKN,
+      jointMovementMm: ask.jointMovementMm,
+      tieDownKN: upliftKN(ask),
+    },
+    lines: [
+      ...articulationLines(ask, site.deck),
+      ...shaftLines(ask, shaft, 'piers', 'pier-concrete', how),
+      ...waterAccessLines(ask, setting.waterDepthM),
+    ],
+    foundations: ground.classes.map((odds) => foundationFor(task, odds)),
+  };
+}

@@ -1,0 +1,101 @@
+import type { Design, RoadProfile, Site, Support, Unit } from '../model/index.ts';
+import { groundAt, waterDepthAt } from '../site/index.ts';
+import type { Hold } from './articulate.ts';
+import { articulate, depthOver } from './articulate.ts';
+import { substructureData } from './data.ts';
+import { pylonFoot } from './pylonFoot.ts';
+import { roadLevelAt } from './roadLevelAt.ts';
+import { standOneSupport } from './standOneSupport.ts';
+import type { SupportAsk } from './supportAsk.ts';
+import { upliftKN } from './supportLines.ts';
+
+/** One unit as it meets one support. */
+interface Meeting {
+  readonly design: Design;
+  readonly at: number;
+  readonly hold: Hold;
+}
+
+/**
+ * Stands every support of an option, in the order of chainage: where two units meet their reactions add up and a joint
+ * takes the movements of both. `designs` has one design per unit, in order.
+ * Throws a RangeError when units and designs do not belong together.
+ */
+export function standSupports(
+  site: Site,
+  units: readonly Unit[],
+  designs: readonly Design[],
+  profile: RoadProfile,
+): Support[] {
+  if (units.length === 0 || units.length !== designs.length) {
+    throw new RangeError(
+      `designs: expected one for each of ${units.length} units, received ${designs.length}`,
+    );
+  }
+  const meetings = new Map<number, Meeting[]>();
+  units.forEach((unit, k) => {
+    const design = designs[k]!;
+    const x = unit.supportsM;
+    if (design.reactions.length !== x.length) {
+      throw new RangeError(
+        `unit ${k + 1}: expected a reaction at each of ${x.length} supports, received ${design.reactions.length}`,
+      );
+    }
+    const height = x.map((c) => roadLevelAt(site, profile, c) - groundAt(site, c));
+    const water = x.map((c) => waterDepthAt(site, c));
+    articulate(site, unit, design, height, water).forEach((hold, at) => {
+      const list = meetings.get(x[at]!) ?? [];
+      list.push({ design, at, hold });
+      meetings.set(x[at]!, list);
+    });
+  });
+  const chainages = [...meetings.keys()].sort((a, b) => a - b);
+  return chainages.map((chainageM, index) => {
+    const end = index === 0 || index === chainages.length - 1;
+    return standOneSupport(site, askAt(site, profile, chainageM, index, end, meetings.get(chainageM)!));
+  });
+}
+
+function askAt(
+  site: Site,
+  profile: RoadProfile,
+  chainageM: number,
+  index: number,
+  end: boolean,
+  meetings: readonly Meeting[],
+): SupportAsk {
+  const roadLevelM = roadLevelAt(site, profile, chainageM);
+  const deepest = Math.max(...meetings.map(({ design, at }) => depthOver(design, at)));
+  const reaction = (key: 'permanentKN' | 'trafficMaxKN' | 'trafficMinKN'): number =>
+    meetings.reduce((sum, { design, at }) => sum + design.reactions[at]![key], 0);
+  const carrier = meetings.find(({ design, at }) => design.task.pylons?.includes(at));
+  const pylon = carrier ? { pylon: pylonFoot(carrier.design, roadLevelM - groundAt(site, chainageM)) } : {};
+  const joint = end || meetings.length > 1;
+  const loads = {
+    permanentKN: reaction('permanentKN'),
+    trafficKN: reaction('trafficMaxKN'),
+    trafficLeastKN: reaction('trafficMinKN'),
+  };
+  const kind = end ? 'abutment' : carrier ? 'pylon' : upliftKN(loads) > 0 ? 'anchor-pier' : 'pier';
+  const word = { abutment: 'abutment', pier: 'pier', pylon: 'pylon', 'anchor-pier': 'anchor pier' }[kind];
+  const fixed = meetings.filter(({ hold }) => hold.fixed);
+  return {
+    name: end ? `${index === 0 ? 'start' : 'end'} ${word}` : `${word} ${index}`,
+    index,
+    kind,
+    chainageM,
+    roadLevelM,
+    soffitLevelM: roadLevelM - site.deck.surfacingM - deepest,
+    ...loads,
+    // Fixed points of two units add; sliding bearings of two units push apart, so the larger counts.
+    alongKN:
+      fixed.length > 0
+        ? fixed.reduce((sum, { hold }) => sum + hold.alongKN, 0)
+        : Math.max(...meetings.map(({ hold }) => hold.alongKN)),
+    acrossKN: meetings.reduce((sum, { hold }) => sum + hold.acrossKN, 0),
+    fixed: fixed.length > 0,
+    bearings: meetings.length * substructureData.bearings.perLine,
+    jointMovementMm: joint ? meetings.reduce((sum, { hold }) => sum + hold.movementMm, 0) : 0,
+    ...pylon,
+  };
+}

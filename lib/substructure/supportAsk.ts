@@ -1,0 +1,33 @@
+import type { Support } from '../model/index.ts';
+
+/** What one support is asked to carry: nothing here knows the form. Loads characteristic, kN. */
+export interface SupportAsk {
+  readonly name: string;
+  /** Index along the crossing; absent in a trial for the cost table. */
+  readonly index?: number;
+  readonly kind: Support['kind'];
+  readonly chainageM: number;
+  /** Finished road level here, m. */
+  readonly roadLevelM: number;
+  /** Level of the lowest soffit that rests here, m. */
+  readonly soffitLevelM: number;
+  readonly permanentKN: number;
+  /** Greatest traffic reaction. */
+  readonly trafficKN: number;
+  /** Least traffic reaction; negative = uplift. */
+  readonly trafficLeastKN: number;
+  /** Along the road at bearing level: braking and friction, or friction of a sliding bearing. */
+  readonly alongKN: number;
+  /** Wind across at deck level, without traffic. */
+  readonly acrossKN: number;
+  readonly fixed: boolean;
+  readonly bearings: number;
+  readonly jointMovementMm: number;
+  /** Pylon only: its own weight, kN, its height above its foot, m, and the plan it stands on, m. */
+  readonly pylon?: {
+    readonly weightKN: number;
+    readonly heightM: number;
+    readonly lengthM: number;
+    readonly widthM: number;
+  };
+}

@@ -1,0 +1,91 @@
+import type { BillPart, DeckSpec, MeasuredLine, PierShaft, Support } from '../model/index.ts';
+import { substructureData } from './data.ts';
+import type { SupportAsk } from './supportAsk.ts';
+
+/** Design vertical load of the bearings of a support, MN: permanent and traffic with their factors. */
+export function bearingLoadMN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficKN'>): number {
+  const { permanent, traffic } = substructureData.factors;
+  return Math.max(0, permanent * ask.permanentKN + traffic * ask.trafficKN) / 1000;
+}
+
+/** Design uplift, kN, 0 where the support stays pressed: 0.95 of the permanent load against the factored least traffic. */
+export function upliftKN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficLeastKN'>): number {
+  const { permanent, favourable, traffic } = substructureData.factors;
+  const held = ask.permanentKN >= 0 ? favourable * ask.permanentKN : permanent * ask.permanentKN;
+  return Math.max(0, -(held + traffic * Math.min(0, ask.trafficLeastKN)));
+}
+
+/** Elements of an expansion joint of 80 mm each for a movement, mm; 0 where there is none. */
+export function jointElements(movementMm: number): number {
+  return Math.ceil(movementMm / substructureData.movement.jointGroupMm - 1e-9);
+}
+
+/** Bearings, joint and tie-down of a support. */
+export function articulationLines(ask: SupportAsk, deck: Pick<DeckSpec, 'widthM'>): MeasuredLine[] {
+  const lines: MeasuredLine[] = [];
+  const load = bearingLoadMN(ask);
+  if (load > 0) {
+    const how = `${ask.bearings} bearings, ${load.toFixed(1)} MN together`;
+    lines.push(line(ask, 'bearings-joints', 'bearing', load, `${ask.name} bearings`, how));
+  }
+  const elements = jointElements(ask.jointMovementMm);
+  if (elements > 0) {
+    const how = `${Math.round(ask.jointMovementMm)} mm: ${elements} elements over ${deck.widthM} m`;
+    lines.push(
+      line(ask, 'bearings-joints', 'expansion-joint', elements * deck.widthM, `${ask.name} joint`, how),
+    );
+  }
+  const uplift = upliftKN(ask) * substructureData.bearings.tieDownShare;
+  if (uplift > 0) {
+    const how = `design uplift ${Math.round(uplift)} kN`;
+    lines.push(line(ask, 'bearings-joints', 'tie-down', uplift / 1000, `${ask.name} tie-down`, how));
+  }
+  return lines;
+}
+
+/** Concrete and bars of a shaft or of the walls of an abutment. */
+export function shaftLines(
+  ask: SupportAsk,
+  shaft: PierShaft,
+  part: BillPart,
+  item: string,
+  how: string,
+): MeasuredLine[] {
+  if (!(shaft.concreteM3 > 0)) return [];
+  return [
+    line(ask, part, item, shaft.concreteM3, `${ask.name} shaft`, how),
+    line(ask, part, 'reinforcement', shaft.reinforcementKg, `${ask.name} shaft`, 'by published ratio'),
+  ];
+}
+
+/** Platform or barge to reach a support in water. */
+export function waterAccessLines(ask: SupportAsk, waterDepthM: number): MeasuredLine[] {
+  if (!(waterDepthM > 0)) return [];
+  const how = `${waterDepthM.toFixed(1)} m of water`;
+  return [line(ask, 'river-works', 'water-access', 1, `${ask.name} access over water`, how)];
+}
+
+/**
+ * All lines of a support, its foundations weighed by the odds of the ground.
+ * For orders of magnitude and the cost table; the simulation draws one class per stretch instead.
+ */
+export function expectedLines(support: Support): MeasuredLine[] {
+  return [
+    ...support.lines,
+    ...support.foundations.flatMap((foundation) =>
+      foundation.lines.map((l) => ({ ...l, quantity: l.quantity * foundation.odds })),
+    ),
+  ];
+}
+
+/** One measured line of a support, with the support's index where it has one. */
+export function line(
+  ask: Pick<SupportAsk, 'index'>,
+  part: BillPart,
+  item: string,
+  quantity: number,
+  what: string,
+  how: string,
+): MeasuredLine {
+  return { part, item, quantity, what, how, ...(ask.index === undefined ? {} : { support: ask.index }) };
+}
