@@ -1,0 +1,241 @@
+import type { Brief, Problem, Study } from '../model/index.ts';
+import { problem } from './problem.ts';
+
+type Path = readonly (string | number)[];
+
+const ODDS_TOLERANCE = 1e-6;
+/** Longest crossing the search is made for, m. */
+const LONGEST_M = 20_000;
+
+function rising(path: Path, from: string, to: string, fromM: number, toM: number): Problem[] {
+  if (fromM < toM) return [];
+  const remedy = `Exchange '${from}' and '${to}' or correct one of them`;
+  return [
+    problem('reversed', [...path, to], `more than '${from}' at ${fromM}`, `${toM}`, { unit: 'm', remedy }),
+  ];
+}
+
+function crossingProblems({ crossing }: Brief): Problem[] {
+  const { startM, endM, ground } = crossing;
+  const path = ['brief', 'crossing'];
+  const found = rising(path, 'startM', 'endM', startM, endM);
+  if (found.length > 0) return found;
+  if (endM - startM > LONGEST_M) {
+    found.push(
+      problem(
+        'too-large-value',
+        [...path, 'endM'],
+        `a crossing of at most ${LONGEST_M}`,
+        `${endM - startM}`,
+        { unit: 'm' },
+      ),
+    );
+  }
+  ground.forEach((point, i) => {
+    const before = ground[i - 1];
+    if (before === undefined || point.chainageM > before.chainageM) return;
+    found.push(
+      problem(
+        'reversed',
+        [...path, 'ground', i, 'chainageM'],
+        `more than ${before.chainageM}`,
+        `${point.chainageM}`,
+        {
+          unit: 'm',
+          remedy: 'Put the points in order of chainage',
+        },
+      ),
+    );
+  });
+  const first = ground[0]!.chainageM;
+  const last = ground.at(-1)!.chainageM;
+  const remedy = 'Add ground levels up to both abutments';
+  if (!(first <= startM)) {
+    const at = [...path, 'ground', 0, 'chainageM'];
+    found.push(
+      problem('outside', at, `at most ${startM}, the start of the crossing`, `${first}`, {
+        unit: 'm',
+        remedy,
+      }),
+    );
+  }
+  if (!(last >= endM)) {
+    const at = [...path, 'ground', ground.length - 1, 'chainageM'];
+    found.push(
+      problem('outside', at, `at least ${endM}, the end of the crossing`, `${last}`, { unit: 'm', remedy }),
+    );
+  }
+  return found;
+}
+
+function obstacleProblems({ crossing, obstacles }: Brief): Problem[] {
+  return obstacles.flatMap((obstacle, i) => {
+    const path = ['brief', 'obstacles', i];
+    const { fromM, toM, clearance } = obstacle;
+    const found = rising(path, 'fromM', 'toM', fromM, toM);
+    if (clearance !== null) {
+      found.push(...rising([...path, 'clearance'], 'fromM', 'toM', clearance.fromM, clearance.toM));
+    }
+    if (obstacle.supports !== 'hard') return found;
+    for (const abutmentM of [crossing.startM, crossing.endM]) {
+      if (fromM < abutmentM && toM > abutmentM) {
+        found.push(
+          problem(
+            'outside',
+            [...path, 'supports'],
+            `no abutment in a barred stretch`,
+            `an abutment at ${abutmentM} m`,
+            {
+              remedy: 'Move the abutment out of the stretch or shorten the stretch',
+            },
+          ),
+        );
+      }
+    }
+    return found;
+  });
+}
+
+function waterProblems({ waters }: Brief): Problem[] {
+  return waters.flatMap((water, i) => {
+    const path = ['brief', 'waters', i];
+    const found = [
+      ...rising(path, 'fromM', 'toM', water.fromM, water.toM),
+      ...rising(path, 'floodFromM', 'floodToM', water.floodFromM, water.floodToM),
+    ];
+    const { floodLevelM, levelM } = water;
+    if (floodLevelM !== 'unknown' && !(floodLevelM >= levelM)) {
+      const expected = `at least the ordinary level of ${levelM}`;
+      found.push(problem('too-small', [...path, 'floodLevelM'], expected, `${floodLevelM}`, { unit: 'm' }));
+    }
+    return found;
+  });
+}
+
+function groundProblems({ crossing, groundStretches }: Brief): Problem[] {
+  const path = ['brief', 'groundStretches'];
+  const found: Problem[] = [];
+  groundStretches.forEach((stretch, i) => {
+    found.push(...rising([...path, i], 'fromM', 'toM', stretch.fromM, stretch.toM));
+    const sum = stretch.classes.reduce((total, { odds }) => total + odds, 0);
+    if (!(Math.abs(sum - 1) <= ODDS_TOLERANCE)) {
+      found.push(
+        problem(
+          'does-not-sum',
+          [...path, i, 'classes'],
+          'odds that add up to 1',
+          `a sum of ${Number(sum.toPrecision(6))}`,
+        ),
+      );
+    }
+    const before = groundStretches[i - 1];
+    if (before !== undefined && before.toM !== stretch.fromM) {
+      const remedy = 'Let each stretch begin where the one before ends';
+      found.push(
+        problem('outside', [...path, i, 'fromM'], `${before.toM}`, `${stretch.fromM}`, { unit: 'm', remedy }),
+      );
+    }
+  });
+  const remedy = 'Extend the stretches of ground to both abutments';
+  const first = groundStretches[0]!.fromM;
+  const last = groundStretches.at(-1)!.toM;
+  if (!(first <= crossing.startM)) {
+    found.push(
+      problem('outside', [...path, 0, 'fromM'], `at most ${crossing.startM}`, `${first}`, {
+        unit: 'm',
+        remedy,
+      }),
+    );
+  }
+  if (!(last >= crossing.endM)) {
+    const at = [...path, groundStretches.length - 1, 'toM'];
+    found.push(problem('outside', at, `at least ${crossing.endM}`, `${last}`, { unit: 'm', remedy }));
+  }
+  return found;
+}
+
+function deckProblems({ deck }: Brief): Problem[] {
+  if (deck.some(({ kind }) => kind === 'lane')) return [];
+  return [
+    problem('missing', ['brief', 'deck'], "at least one strip of kind 'lane'", 'none', {
+      remedy: 'Add a lane',
+    }),
+  ];
+}
+
+function bookProblems({ books }: Study): Problem[] {
+  const path = ['books', 'rates'];
+  return books.rates.flatMap((rate, i) => {
+    const found: Problem[] = [];
+    if (!(rate.p10 <= rate.p50 && rate.p50 <= rate.p90)) {
+      const received = `${rate.p10}, ${rate.p50}, ${rate.p90}`;
+      found.push(problem('reversed', [...path, i, 'p50'], 'low, likely and high in rising order', received));
+    }
+    if (books.rates.findIndex(({ item }) => item === rate.item) !== i) {
+      const remedy = 'Keep one of the rates for this item';
+      found.push(
+        problem('refused', [...path, i, 'item'], 'an item that is typed over once', `'${rate.item}' again`, {
+          remedy,
+        }),
+      );
+    }
+    return found;
+  });
+}
+
+function numberedOnce(path: Path, numbered: readonly { readonly number: number }[]): Problem[] {
+  return numbered.flatMap(({ number }, i) => {
+    if (numbered.findIndex((other) => other.number === number) === i) return [];
+    const remedy = 'Give it the next free number';
+    return [problem('refused', [...path, i, 'number'], 'a number given once', `${number} again`, { remedy })];
+  });
+}
+
+function optionProblems({ options }: Study): Problem[] {
+  const found = [
+    ...numberedOnce(['options', 'register'], options.register),
+    ...numberedOnce(['options', 'kept'], options.kept),
+  ];
+  options.kept.forEach((kept, k) => {
+    kept.units.forEach((unit, u) => {
+      const path = ['options', 'kept', k, 'units', u];
+      unit.supportsM.forEach((x, i) => {
+        const before = unit.supportsM[i - 1];
+        if (before === undefined || x > before) return;
+        found.push(
+          problem('reversed', [...path, 'supportsM', i], `more than ${before}`, `${x}`, { unit: 'm' }),
+        );
+      });
+      const joint = kept.units[u - 1]?.supportsM.at(-1);
+      if (joint !== undefined && joint !== unit.supportsM[0]) {
+        const remedy = 'Let each unit begin on the last support of the one before';
+        found.push(
+          problem('outside', [...path, 'supportsM', 0], `${joint}`, `${unit.supportsM[0]!}`, {
+            unit: 'm',
+            remedy,
+          }),
+        );
+      }
+      (unit.pylons ?? []).forEach((pylon, i) => {
+        if (pylon < unit.supportsM.length) return;
+        const expected = `at most ${unit.supportsM.length - 1}, the last support`;
+        found.push(problem('outside', [...path, 'pylons', i], expected, `${pylon}`));
+      });
+    });
+  });
+  return found;
+}
+
+/** What a study must also satisfy beyond the shape of its file; all problems, in the order of the file. */
+export function checkStudy(study: Study): Problem[] {
+  const { brief } = study;
+  return [
+    ...crossingProblems(brief),
+    ...deckProblems(brief),
+    ...obstacleProblems(brief),
+    ...waterProblems(brief),
+    ...groundProblems(brief),
+    ...bookProblems(study),
+    ...optionProblems(study),
+  ];
+}

@@ -1,0 +1,203 @@
+import { z } from 'zod';
+import {
+  formIds,
+  groundClassIds,
+  methodIds,
+  obstacleKinds,
+  standardIds,
+  stripKinds,
+  type FormId,
+} from '../model/index.ts';
+import { fillGround } from './fillGround.ts';
+
+// The pages forbid evaluated code, so schemas must not compile themselves.
+z.config({ jitless: true });
+
+/** Version of the study file written by this tool. */
+export const studyVersion = 1;
+
+/** Largest chainage or level taken seriously, m: beyond it a figure is a slip of the keyboard. */
+const FAR_M = 1e7;
+
+const unknown = z.literal('unknown');
+const text = z.string().max(20_000);
+const name = z.string().min(1).max(500);
+const chainage = z.number().min(-FAR_M).max(FAR_M);
+const level = z.number().min(-12_000).max(9_000);
+const width = z.number().positive().max(200);
+const money = z.number().positive().max(1e13);
+const optionNumber = z.int().min(1).max(100_000);
+const form = z.enum(formIds);
+const forms = z.array(form).max(formIds.length);
+const orUnknown = <T extends z.ZodType>(schema: T) => z.union([unknown, schema]);
+
+const crossing = z.strictObject({
+  startM: chainage,
+  endM: chainage,
+  ground: z
+    .array(z.strictObject({ chainageM: chainage, levelM: level }))
+    .min(2)
+    .max(20_000),
+  planRadiusM: z.union([unknown, z.literal('straight'), z.number().min(10).max(1e6)]).default('unknown'),
+  skewDeg: orUnknown(z.number().min(-75).max(75)).default('unknown'),
+});
+
+const road = z.strictObject({
+  startLevelM: level,
+  endLevelM: level,
+  fixedEnd: z.enum(['start', 'end', 'both', 'none']).default('both'),
+  mayRiseM: z.number().min(0).max(200).default(0),
+  maxGradient: z.number().positive().max(0.25).default(0.06),
+  fillSideSlope: z.number().min(0).max(10).default(2),
+});
+
+const strip = z
+  .strictObject({ kind: z.enum(stripKinds), widthM: width, ultimateWidthM: width.optional() })
+  .transform((given) => ({ ...given, ultimateWidthM: given.ultimateWidthM ?? given.widthM }));
+
+const clearance = z.strictObject({
+  fromM: chainage,
+  toM: chainage,
+  datumLevelM: level,
+  headroomM: z.number().positive().max(200),
+  confirmed: z.boolean().default(false),
+});
+
+const obstacle = z.strictObject({
+  kind: z.enum(obstacleKinds),
+  name,
+  fromM: chainage,
+  toM: chainage,
+  supports: z.enum(['hard', 'soft', 'none']),
+  clearance: clearance.nullable().default(null),
+});
+
+const water = z
+  .strictObject({
+    name,
+    fromM: chainage,
+    toM: chainage,
+    levelM: level,
+    floodLevelM: orUnknown(level).default('unknown'),
+    floodReturnYears: orUnknown(z.number().positive().max(100_000)).default('unknown'),
+    freeboardM: z.number().min(0).max(50).default(1),
+    floodFromM: chainage.optional(),
+    floodToM: chainage.optional(),
+  })
+  .transform((given) => ({
+    ...given,
+    floodFromM: given.floodFromM ?? given.fromM,
+    floodToM: given.floodToM ?? given.toM,
+  }));
+
+const groundOdds = z.strictObject({
+  ground: z.enum(groundClassIds),
+  bearingLevelM: level,
+  odds: z.number().min(0).max(1),
+});
+
+const groundStretch = z.strictObject({
+  fromM: chainage,
+  toM: chainage,
+  known: z.boolean().optional(),
+  classes: orUnknown(z.array(groundOdds).min(1).max(20)),
+});
+
+const access = z.strictObject({
+  haulLengthM: orUnknown(z.number().positive().max(1000)).default('unknown'),
+  haulMassT: orUnknown(z.number().positive().max(1e5)).default('unknown'),
+  crane: orUnknown(z.boolean()).default('unknown'),
+  barge: orUnknown(z.boolean()).default('unknown'),
+});
+
+const budget = z.strictObject({ amount: money, priceDate: name, includes: text.default('') });
+
+const brief = z
+  .strictObject({
+    crossing,
+    road,
+    deck: z.array(strip).min(1).max(100),
+    surfacingM: z.number().min(0).max(1).default(0.09),
+    loading: z.enum(standardIds).default('lm1'),
+    obstacles: z.array(obstacle).max(1000).default([]),
+    waters: z.array(water).max(100).default([]),
+    groundStretches: orUnknown(z.array(groundStretch).min(1).max(1000)).default('unknown'),
+    access: access.prefault({}),
+    budget: orUnknown(budget).default('unknown'),
+  })
+  .transform((given) => ({ ...given, groundStretches: fillGround(given.groundStretches, given.crossing) }));
+
+const rate = z.number().min(0).max(1e9);
+const books = z.strictObject({
+  currency: z.string().min(1).max(10).default('EUR'),
+  ratePack: name.default('demo-2026'),
+  rates: z
+    .array(z.strictObject({ item: name, p10: rate, p50: rate, p90: rate, reason: name }))
+    .max(1000)
+    .default([]),
+  draws: z.int().min(100).max(1_000_000).default(10_000),
+  seed: z.int().min(0).max(0xffff_ffff).default(20_260_101),
+  unseparated: z.tuple([z.number().min(0).max(0.5), z.number().min(0.5).max(1)]).default([0.2, 0.8]),
+});
+
+const unit = z.strictObject({
+  form,
+  role: z.enum(['main', 'approach']),
+  supportsM: z.array(chainage).min(2).max(5000),
+  pylons: z.array(z.int().min(0).max(4999)).min(1).max(20).exactOptional(),
+});
+
+const options = z.strictObject({
+  forms: forms.default([]),
+  workOutAnyway: forms.default([] as FormId[]),
+  register: z
+    .array(
+      z.strictObject({
+        number: optionNumber,
+        form,
+        method: z.enum(methodIds),
+        supports: z.int().min(2).max(5000),
+      }),
+    )
+    .max(10_000)
+    .default([]),
+  kept: z
+    .array(
+      z.strictObject({
+        number: optionNumber,
+        form,
+        method: z.enum(methodIds),
+        units: z.array(unit).min(1).max(100),
+        depthM: z.number().positive().max(100).nullable().default(null),
+      }),
+    )
+    .max(1000)
+    .default([]),
+  reference: optionNumber.nullable().default(null),
+});
+
+const priorities = z.strictObject({
+  weights: z.record(z.string().max(200), z.number().min(0).max(1e6)).default({}),
+});
+const note = z.strictObject({ about: name, text, author: text.default(''), date: text.default('') });
+const decision = z.strictObject({
+  option: optionNumber,
+  reasons: z.array(text).max(1000).default([]),
+  author: text.default(''),
+  date: text.default(''),
+});
+
+/** The study file, version `studyVersion`: strict keys, every default applied once; its output is `Study`. */
+export const studySchema = z.strictObject({
+  format: z.literal('spanledger-study'),
+  version: z.literal(studyVersion),
+  title: name,
+  reference: text.default(''),
+  notice: text.default(''),
+  brief,
+  books: books.prefault({}),
+  options: options.prefault({}),
+  priorities: priorities.prefault({}),
+  notes: z.array(note).max(10_000).default([]),
+  decision: decision.nullable().default(null),
+});
