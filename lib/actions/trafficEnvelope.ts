@@ -1,0 +1,126 @@
+import {
+  addLine,
+  addLoadMoment,
+  addLoadShear,
+  beamTrack,
+  deflectionLine,
+  sources,
+  uniform,
+  type Extremes,
+  type LineBeam,
+} from '../mechanics/index.ts';
+import { plainQuest, trafficOnLine } from './trafficOnLine.ts';
+import type { TrafficLoad } from './trafficLoad.ts';
+
+/** Extremes of traffic at the stations and supports of a beam, characteristic, dynamic allowance included. */
+export interface TrafficEnvelope {
+  /** Sagging positive; max is 0 or more, min 0 or less. */
+  readonly momentMaxKNm: Float64Array;
+  readonly momentMinKNm: Float64Array;
+  /** Of the sections just left and just right of each station. */
+  readonly shearMaxKN: Float64Array;
+  readonly shearMinKN: Float64Array;
+  /** Upward positive; min below 0 pulls the beam up from its support. */
+  readonly reactionMaxKN: Float64Array;
+  readonly reactionMinKN: Float64Array;
+  readonly springMaxKN: Float64Array;
+  readonly springMinKN: Float64Array;
+  /** Greatest downward deflection, m. Zeros unless asked for. */
+  readonly deflectionM: Float64Array;
+  /** True when an adverse loaded length lies beyond the reach of the standard: the result is then on the safe side. */
+  readonly beyondScope: boolean;
+}
+
+export interface EnvelopeOptions {
+  /** Deflections are asked for by default at every station; `false` leaves them out. */
+  readonly deflection?: boolean;
+}
+
+/**
+ * Places a traffic load on every influence line of a beam: moments and shears at all stations, reactions, springs and
+ * deflections. Lines follow one another from left to right, so that each costs a few sums.
+ */
+export function trafficEnvelope(
+  beam: LineBeam,
+  load: TrafficLoad,
+  options: EnvelopeOptions = {},
+): TrafficEnvelope {
+  const { xM } = beam;
+  const n = xM.length;
+  const track = beamTrack(beam);
+  const hogs = uniform(beam, 1).momentKNm;
+  const result = emptyEnvelope(beam);
+  const out: Extremes = { max: 0, min: 0 };
+  const shearLoad = {
+    ...load,
+    vehicleFactor: load.vehicleFactor * load.shearRatio,
+    udlKNm: load.udlKNm * load.shearRatio,
+  };
+  let beyond = false;
+
+  // Sum of the reactions to the left of the section (its shear) and of their moments about the start of the beam.
+  const Q = new Float64Array(4 * (n - 1));
+  const T = new Float64Array(4 * (n - 1));
+  const line = new Float64Array(4 * (n - 1));
+  const at = sources(beam);
+  const shear = (s: number): void => {
+    line.set(Q);
+    addLoadShear(line, s);
+    beyond = trafficOnLine(shearLoad, track, line, { ...plainQuest, jumpAt: s }, out) || beyond;
+    result.shearMaxKN[s] = Math.max(result.shearMaxKN[s]!, out.max);
+    result.shearMinKN[s] = Math.min(result.shearMinKN[s]!, out.min);
+  };
+  if (beam.startMomentLine) addLine(T, -1, beam.startMomentLine);
+  for (let s = 0; s < n; s++) {
+    const x = xM[s]!;
+    for (let i = 0; i < line.length; i++) line[i] = x * Q[i]! - T[i]!;
+    addLoadMoment(line, xM, s);
+    // Along a span the hogging part has the same sign as under a uniform load (points of contraflexure).
+    const quest = { jumpAt: -1, hogging: hogs[s]! < -1e-9 * x * x, innerReaction: false };
+    beyond = trafficOnLine(load, track, line, quest, out) || beyond;
+    result.momentMaxKNm[s] = out.max;
+    result.momentMinKNm[s] = out.min;
+
+    const here = at.flatMap((station, j) => (station === s ? [j] : []));
+    if (s > 0) shear(s);
+    for (const j of here) {
+      addLine(Q, 1, beam.reactionLines[j]!);
+      addLine(T, x, beam.reactionLines[j]!);
+    }
+    if (s < n - 1 && (here.length > 0 || s === 0)) shear(s);
+  }
+
+  const supports = beam.supportAt.length;
+  at.forEach((station, j) => {
+    const inner = station > 0 && station < n - 1;
+    const quest = { jumpAt: -1, hogging: false, innerReaction: inner && j < supports };
+    beyond = trafficOnLine(shearLoad, track, beam.reactionLines[j]!, quest, out) || beyond;
+    const [max, min] =
+      j < supports ? [result.reactionMaxKN, result.reactionMinKN] : [result.springMaxKN, result.springMinKN];
+    max[j < supports ? j : j - supports] = out.max;
+    min[j < supports ? j : j - supports] = out.min;
+  });
+  if (options.deflection !== false) {
+    for (let s = 0; s < n; s++) {
+      if (beam.supportAt.includes(s)) continue;
+      trafficOnLine(load, track, deflectionLine(beam, s), plainQuest, out);
+      result.deflectionM[s] = out.max;
+    }
+  }
+  return { ...result, beyondScope: beyond };
+}
+
+function emptyEnvelope(beam: LineBeam): Omit<TrafficEnvelope, 'beyondScope'> {
+  const n = beam.xM.length;
+  return {
+    momentMaxKNm: new Float64Array(n),
+    momentMinKNm: new Float64Array(n),
+    shearMaxKN: new Float64Array(n),
+    shearMinKN: new Float64Array(n),
+    reactionMaxKN: new Float64Array(beam.supportAt.length),
+    reactionMinKN: new Float64Array(beam.supportAt.length),
+    springMaxKN: new Float64Array(beam.springAt.length),
+    springMinKN: new Float64Array(beam.springAt.length),
+    deflectionM: new Float64Array(n),
+  };
+}
