@@ -1,0 +1,3 @@
+export { itemOf, items, type Item } from './items.ts';
+export { measure } from './measure.ts';
+export { perM2, quantitiesOf, splitQuantities } from './quantitiesOf.ts';
