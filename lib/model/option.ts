@@ -34,8 +34,8 @@ export interface CostTable {
   deckPerM(form: FormId, spanM: number, governingM: number): number;
   /** Structural depth at midspan, m, for a governing span. */
   depthM(form: FormId, governingM: number): number;
-  /** Fixed cost of a unit of this form (pylons, mobilisation of its method), money. */
-  unitFixed(form: FormId, governingM: number): number;
+  /** Fixed cost of a unit of this form (pylons, set-up of its method), money; `pylons` is 0 unless given. */
+  unitFixed(form: FormId, governingM: number, pylons?: number): number;
   /** Cost of one intermediate support with its foundation, bearings included, money. */
   support(form: FormId, chainageM: number, spanLeftM: number, spanRightM: number): number;
 }

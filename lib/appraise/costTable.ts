@@ -1,0 +1,166 @@
+import { formModule } from '../forms/index.ts';
+import type { CostTable, Design, FormId, MeasuredLine, MethodId, Site } from '../model/index.ts';
+import { sideRatioWindow, spanWindow } from '../rules/index.ts';
+import { deckOnSupport, expectedLines, standPierBetween } from '../substructure/index.ts';
+import { depthRange } from './depthRange.ts';
+import { leastCostDepth } from './leastCostDepth.ts';
+import type { Sizer } from './sizer.ts';
+
+/** Governing spans at which each form is really sized; in between the table is read off straight lines. */
+const TABLE_SPANS = 10;
+/** Shares of the governing span at which the shorter spans of a unit are sized with the depth of the longest. */
+const SHARES = [0.5, 0.75, 1] as const;
+/** End over interior span of a trial unit: inside every published window. */
+const TRIAL_END_RATIO = 0.78;
+
+interface Row {
+  readonly spanM: number;
+  readonly depthM: number;
+  /** Money per m of deck at each of `SHARES`. */
+  readonly perM: readonly number[];
+  /** Money that does not grow with the deck, by number of pylons. */
+  readonly fixed: readonly number[];
+  readonly design: Design;
+}
+
+/** Money of measured lines at one rate per item. */
+export type CostOf = (lines: readonly MeasuredLine[]) => number;
+
+const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.item === 'method-setup';
+
+/** A unit of ordinary proportions for one governing span: its spans, and its pylons where the form has them. */
+function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number[]; pylons?: number[] } {
+  const pattern = formModule(form).pattern;
+  if (pattern.kind === 'simple-main') return { spansM: [spanM] };
+  if (pattern.kind === 'continuous') {
+    return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
+  }
+  const [least, most] =
+    sideRatioWindow(form, pylons) ?? (pylons === 1 ? pattern.onePylonBack : pattern.twoPylonSide);
+  const side = ((least + most) / 2) * spanM;
+  return pylons === 1
+    ? { spansM: [spanM, side], pylons: [1] }
+    : { spansM: [side, spanM, side], pylons: [1, 2] };
+}
+
+function rowsOf(form: FormId, method: MethodId, site: Site, size: Sizer, costOf: CostOf): Row[] {
+  const { possible } = spanWindow(form);
+  const least = Math.max(possible[0], 8);
+  const most = Math.min(possible[1], Math.max(site.lengthM, 1.05 * least));
+  if (!(least < most)) return [];
+  const hung = formModule(form).pattern.kind === 'pylon';
+  const planRadiusM = site.planRadiusM ?? Infinity;
+
+  const sized = (
+    spanM: number,
+    depthM: number,
+    pylons: 1 | 2,
+  ): { design: Design; perM: number; fixed: number } => {
+    const unit = trialUnit(form, spanM, pylons);
+    const design = size({
+      form,
+      method,
+      deck: site.deck,
+      standard: site.standard,
+      planRadiusM,
+      depthM,
+      ...unit,
+    });
+    const length = unit.spansM.reduce((sum, span) => sum + span, 0);
+    return {
+      design,
+      perM: costOf(design.lines.filter((line) => !isFixed(line))) / length,
+      fixed: costOf(design.lines.filter(isFixed)),
+    };
+  };
+
+  return Array.from({ length: TABLE_SPANS }, (_, i) => {
+    const spanM = least * Math.pow(most / least, i / (TABLE_SPANS - 1));
+    const { spansM } = trialUnit(form, spanM, 1);
+    const depthM = leastCostDepth(depthRange(form, method, spansM, site.deck), (trialM) => {
+      const { design, perM } = sized(spanM, trialM, 1);
+      return { cost: perM, utilisation: design.limitingCheck.utilisation };
+    });
+    const whole = sized(spanM, depthM, 1);
+    const perM = SHARES.map((share) =>
+      share === 1 || hung ? whole.perM : sized(share * spanM, depthM, 1).perM,
+    );
+    const fixed = hung ? [whole.fixed, whole.fixed, sized(spanM, depthM, 2).fixed] : [whole.fixed];
+    return { spanM, depthM, perM, fixed, design: whole.design };
+  });
+}
+
+/** Position of a value on a rising grid: index of the interval and share within it, held at both ends. */
+function between(grid: readonly number[], value: number): readonly [index: number, share: number] {
+  let i = 0;
+  while (i < grid.length - 2 && grid[i + 1]! < value) i += 1;
+  const low = grid[i]!;
+  const high = grid[i + 1] ?? low;
+  return [i, high > low ? Math.min(1, Math.max(0, (value - low) / (high - low))) : 0];
+}
+
+/**
+ * What the search knows of cost, made by the real sizing, take-off and mean rates: deck cost and depth of each form
+ * at ten spans of its possible band, supports by what they meet at their chainage.
+ *
+ * @param forms each form with its method; approach forms included
+ * @param costOf money of measured lines at mean rates
+ */
+export function costTable(
+  forms: readonly { readonly form: FormId; readonly method: MethodId }[],
+  site: Site,
+  size: Sizer,
+  costOf: CostOf,
+): CostTable {
+  const tables = new Map<FormId, { rows: Row[]; spans: number[] }>();
+  for (const { form, method } of forms) {
+    const rows = rowsOf(form, method, site, size, costOf);
+    tables.set(form, { rows, spans: rows.map((row) => row.spanM) });
+  }
+  const tableOf = (form: FormId): { rows: Row[]; spans: number[] } => {
+    const table = tables.get(form);
+    if (!table || table.rows.length === 0)
+      throw new RangeError(`cost table: expected rows for ${form}, found none`);
+    return table;
+  };
+  const read = (form: FormId, spanM: number, value: (row: Row) => number): number => {
+    const { rows, spans } = tableOf(form);
+    const [i, share] = between(spans, spanM);
+    const low = value(rows[i]!);
+    return low + share * (value(rows[i + 1] ?? rows[i]!) - low);
+  };
+
+  const roadLevel = (chainageM: number): number => {
+    const { road, startM, lengthM } = site;
+    return road.startLevelM + ((road.endLevelM - road.startLevelM) * (chainageM - startM)) / lengthM;
+  };
+  const piers = new Map<string, number>();
+  /** Spans beside a support are told apart to this, m: the support cost changes slowly with them. */
+  const SPAN_CLASS_M = 5;
+
+  return {
+    deckPerM(form, spanM, governingM) {
+      const share = governingM > 0 ? spanM / governingM : 1;
+      const [i, within] = between(SHARES, share);
+      const at = (k: number): number => read(form, governingM, (row) => row.perM[k]!);
+      return at(i) + within * (at(i + 1) - at(i));
+    },
+    depthM: (form, governingM) => read(form, governingM, (row) => row.depthM),
+    unitFixed: (form, governingM, pylons = 0) =>
+      read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),
+    support(form, chainageM, spanLeftM, spanRightM) {
+      const mean = (spanLeftM + spanRightM) / 2;
+      const on = Math.max(1, Math.round(mean / SPAN_CLASS_M)) * SPAN_CLASS_M;
+      const key = `${form} ${chainageM} ${on}`;
+      const found = piers.get(key);
+      if (found !== undefined) return found;
+      const { rows, spans } = tableOf(form);
+      const [i, share] = between(spans, on);
+      const row = rows[share > 0.5 ? i + 1 : i] ?? rows[i]!;
+      const pier = standPierBetween(site, deckOnSupport(row.design), chainageM, on, on, roadLevel(chainageM));
+      const cost = costOf(expectedLines(pier));
+      piers.set(key, cost);
+      return cost;
+    },
+  };
+}
