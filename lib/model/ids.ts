@@ -26,6 +26,27 @@ export const formIds = [
 ] as const;
 export type FormId = (typeof formIds)[number];
 
+/** The family each form belongs to. */
+export const familyOf: Readonly<Record<FormId, Family>> = {
+  slab: 'slab',
+  'portal-frame': 'slab',
+  'precast-i': 'girder',
+  'precast-trough': 'girder',
+  'adjacent-box': 'girder',
+  'half-through': 'girder',
+  'composite-i': 'girder',
+  'composite-box': 'box',
+  'concrete-box': 'box',
+  'cantilever-box': 'box',
+  'steel-box': 'box',
+  truss: 'truss',
+  'tied-arch': 'arch',
+  'deck-arch': 'arch',
+  extradosed: 'cable-supported',
+  'cable-stayed': 'cable-supported',
+  suspension: 'cable-supported',
+};
+
 /** Methods of construction. */
 export const methodIds = ['crane', 'falsework', 'launch', 'float-in', 'stay-cantilever'] as const;
 export type MethodId = (typeof methodIds)[number];

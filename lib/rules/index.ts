@@ -1,0 +1,20 @@
+export { bibliography, factDictionary, rule, rules, rulesFor, source } from './book.ts';
+export { evaluate, type Evaluated, type Truth } from './evaluate.ts';
+export { flip } from './flip.ts';
+export { cite, printed } from './reason.ts';
+export type { Condition, Fact, Rule, Source, Subject } from './rule.ts';
+export { checkFacts, missingFacts, rulingsFor, type MissingFact } from './rulingsFor.ts';
+export { statusFlip, statusOf } from './statusOf.ts';
+export {
+  depthBand,
+  depthMeasure,
+  endRatioWindow,
+  floorBand,
+  leastHeadroomSpareM,
+  midspanDepthBand,
+  sideRatioWindow,
+  spanWindow,
+  windowOf,
+  type DepthMeasure,
+  type Interval,
+} from './windows.ts';
