@@ -57,8 +57,12 @@ export function fatigueOnCrossLine(id: StandardId, deck: DeckSpec, line: CrossLi
     const one = trafficOnCrossLine(id, lane, line);
     if (worst === null || one.vehicleFactor > worst.vehicleFactor) worst = one;
   }
-  return scaled(worst!, fatigue.vehicle / presence, 0);
+  const allowance = (1 + fatigueDynamicAllowance) / (1 + standard.dynamicAllowance);
+  return scaled(worst!, (fatigue.vehicle / presence) * allowance, 0);
 }
+
+/** AASHTO LRFD table 3.6.2.1-1, from memory. */
+const fatigueDynamicAllowance = 0.15;
 
 function scaled(load: TrafficLoad, vehicle: number, uniform: number): TrafficLoad {
   return {

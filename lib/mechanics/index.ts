@@ -30,3 +30,70 @@ export { beamTrack, straightLine } from './placing/beamTrack.ts';
 export { runGroup, type Extremes } from './placing/axles.ts';
 export { runTwoGroups } from './placing/twoGroups.ts';
 export { lineAreas, type LineAreas } from './placing/areas.ts';
+export {
+  polygonProperties,
+  type PolygonProperties,
+  type SectionPoint,
+} from './sections/polygonProperties.ts';
+export { sectionProperties, type SectionPart, type SectionProperties } from './sections/sectionProperties.ts';
+export { plasticMoment, type PlasticMoment, type PlasticPart } from './sections/plasticMoment.ts';
+export { shearArea } from './sections/shearArea.ts';
+export {
+  bredt,
+  compactTorsion,
+  multiCellTorsion,
+  openTorsion,
+  rectangleTorsion,
+  type Cell,
+  type SharedWall,
+  type Wall,
+} from './sections/torsion.ts';
+export {
+  columnReduction,
+  columnSlenderness,
+  effectiveWidthRatio,
+  internalPlateFactor,
+  outstandWidthRatio,
+  plateSlenderness,
+  shearBucklingFactor,
+  webShearCapacity,
+  yieldRatio,
+  type BucklingCurve,
+  type WebShear,
+} from './members/plateBuckling.ts';
+export {
+  planeTruss,
+  trussForces,
+  trussInfluence,
+  type NodeLoad,
+  type PlaneTruss,
+  type TrussEffects,
+  type TrussGeometry,
+} from './members/planeTruss.ts';
+export {
+  catenary,
+  catenaryCheck,
+  ernstModulus,
+  mainCableAreaM2,
+  mainCableVolumeM3,
+  parabolicCable,
+  stayForce,
+  stayVolumeFan,
+  stayVolumeHarp,
+  type Catenary,
+  type ParabolicCable,
+  type StayFan,
+  type StayForce,
+} from './members/cables.ts';
+export {
+  archInPlaneCriticalKN,
+  archLengthM,
+  archLines,
+  archMomentInfluence,
+  archOutOfPlaneCriticalKN,
+  archRise,
+  archThrust,
+  archThrustInfluence,
+  halfSpanMomentKNm,
+  type ArchKind,
+} from './members/arches.ts';
