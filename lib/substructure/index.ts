@@ -1,4 +1,3 @@
-export { roadLevelAt } from './roadLevelAt.ts';
 export { deckOnSupport, standPierBetween, type DeckOnSupport } from './standPierBetween.ts';
 export { standOneSupport } from './standOneSupport.ts';
 export type { SupportAsk } from './supportAsk.ts';

@@ -1,4 +1,5 @@
 import type { Design, Site, Support } from '../model/index.ts';
+import { constructionDepth } from '../site/constructionDepth.ts';
 import { substructureData } from './data.ts';
 import { windOnDeck } from './loads.ts';
 import { standOneSupport } from './standOneSupport.ts';
@@ -54,7 +55,7 @@ export function standPierBetween(
     kind: 'pier',
     chainageM,
     roadLevelM,
-    soffitLevelM: roadLevelM - site.deck.surfacingM - deck.depthM,
+    soffitLevelM: roadLevelM - constructionDepth(site.deck, deck.depthM),
     permanentKN,
     trafficKN: deck.trafficKNm * length,
     trafficLeastKN: 0,

@@ -1,10 +1,11 @@
 import type { Design, RoadProfile, Site, Support, Unit } from '../model/index.ts';
-import { groundAt, waterDepthAt } from '../site/index.ts';
+import { constructionDepth } from '../site/constructionDepth.ts';
+import { groundAt, roadLevelAt, waterDepthAt } from '../site/index.ts';
 import type { Hold } from './articulate.ts';
 import { articulate, depthOver } from './articulate.ts';
 import { substructureData } from './data.ts';
 import { pylonFoot } from './pylonFoot.ts';
-import { roadLevelAt } from './roadLevelAt.ts';
+
 import { standOneSupport } from './standOneSupport.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import { upliftKN } from './supportLines.ts';
@@ -85,7 +86,7 @@ function askAt(
     kind,
     chainageM,
     roadLevelM,
-    soffitLevelM: roadLevelM - site.deck.surfacingM - deepest,
+    soffitLevelM: roadLevelM - constructionDepth(site.deck, deepest),
     ...loads,
     // Fixed points of two units add; sliding bearings of two units push apart, so the larger counts.
     alongKN:

@@ -1,0 +1,2 @@
+export type { Contender } from './contender.ts';
+export { stand } from './stand.ts';

@@ -1,0 +1,87 @@
+import type { Books, FormId, Site } from '../model/index.ts';
+import { items } from '../takeoff/index.ts';
+import type { DriverId } from './drivers.ts';
+import { driverData, driverIds } from './drivers.ts';
+import { normalQuantile } from './normal.ts';
+import { uniformStream } from './stream.ts';
+
+/**
+ * One set of draws of a study, common to every option. Every array holds one value a draw and is never written again.
+ * It depends on the seed, the number of draws, the ground odds and the forms; not on rates, quantities or options.
+ */
+export interface Draws {
+  readonly count: number;
+  readonly seed: number;
+  /** Standard normal draws of each driver. */
+  readonly drivers: Readonly<Record<DriverId, Float64Array>>;
+  /** Standard normal draws of each item's own spread. */
+  readonly own: ReadonlyMap<string, Float64Array>;
+  /** For each ground stretch, the index of the class drawn. */
+  readonly ground: readonly Uint8Array[];
+  /** Factor of the private model error of each form, median 1: one draw shared by all options of the form. */
+  readonly modelError: ReadonlyMap<FormId, Float64Array>;
+}
+
+/**
+ * Draws the drivers once for a study. Each driver, item, stretch and form has its own stream, so that adding a form or an
+ * item leaves every other draw as it was.
+ * Throws a RangeError on fewer than 100 draws, a seed that is no integer, or a form without a model error.
+ */
+export function drawDrivers(
+  site: Pick<Site, 'groundStretches'>,
+  books: Pick<Books, 'draws' | 'seed'>,
+  forms: readonly FormId[],
+): Draws {
+  const { draws: count, seed } = books;
+  if (!(Number.isInteger(count) && count >= 100)) {
+    throw new RangeError(`draws: expected a whole number of 100 or more, received ${count}`);
+  }
+  if (!Number.isSafeInteger(seed)) throw new RangeError(`seed: expected a whole number, received ${seed}`);
+  const drivers = Object.fromEntries(
+    driverIds.map((id) => [id, normals(count, seed, `driver ${id}`)]),
+  ) as Record<DriverId, Float64Array>;
+  const own = new Map(items.map(({ id }) => [id, normals(count, seed, `item ${id}`)]));
+  const ground = site.groundStretches.map(({ classes }, index) =>
+    classesDrawn(
+      count,
+      uniformStream(seed, `ground ${index}`),
+      classes.map(({ odds }) => odds),
+    ),
+  );
+  const modelError = new Map(forms.map((form) => [form, modelErrors(form, count, seed)]));
+  return { count, seed, drivers, own, ground, modelError };
+}
+
+function normals(count: number, seed: number, name: string): Float64Array {
+  const next = uniformStream(seed, name);
+  const Z = new Float64Array(count);
+  for (let k = 0; k < count; k++) Z[k] = normalQuantile(next());
+  return Z;
+}
+
+function classesDrawn(count: number, next: () => number, odds: readonly number[]): Uint8Array {
+  const C = new Uint8Array(count);
+  const last = odds.length - 1;
+  for (let k = 0; k < count; k++) {
+    let u = next();
+    let index = 0;
+    while (index < last && u >= odds[index]!) {
+      u -= odds[index]!;
+      index++;
+    }
+    C[k] = index;
+  }
+  return C;
+}
+
+function modelErrors(form: FormId, count: number, seed: number): Float64Array {
+  const found = driverData.modelError.find((entry) => entry.form === form);
+  if (found === undefined) {
+    throw new RangeError(
+      `model error of ${form}: expected an entry in data/rates/drivers.json, received none; add one`,
+    );
+  }
+  const E = normals(count, seed, `form ${form}`);
+  for (let k = 0; k < count; k++) E[k] = Math.exp(found.sigma * E[k]!);
+  return E;
+}

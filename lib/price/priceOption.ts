@@ -1,0 +1,166 @@
+import type { BillPart, FormId, MeasuredLine, Spread, WorkedOption } from '../model/index.ts';
+import { billParts } from '../model/index.ts';
+import type { Draws } from './drawDrivers.ts';
+import type { RateDraws } from './drawRates.ts';
+import { quantileOf } from './quantile.ts';
+import { halfSigmas } from './rates.ts';
+
+/** What an option costs on the draws of the study, money. */
+export interface PricedOption {
+  /** Cost in each draw. */
+  readonly totals: Float64Array;
+  readonly cost: Spread;
+  readonly quartiles: readonly [q1: number, q3: number];
+  /** Median of each part of the bill, in the order of the bill. Medians of parts do not add up to the median of the whole. */
+  readonly parts: readonly { readonly part: BillPart; readonly p50: number }[];
+  /** Median of the cost without the approaches. */
+  readonly withoutApproachesP50: number;
+}
+
+/** What pricing reads of an option. */
+export type Priceable = Pick<WorkedOption, 'units' | 'lines' | 'supports' | 'months'>;
+
+/**
+ * Prices one option on the draws of its study: quantities times drawn rates, lines of each unit times the model error of its
+ * form, months by the productivity driver, and under every support the foundation of the ground class drawn for its stretch.
+ * Risk is carried by these draws alone; no contingency is added on top.
+ * Throws a RangeError on a line without a rate, a form without draws, or a support whose foundations do not match its stretch.
+ */
+export function priceOption(option: Priceable, draws: Draws, rates: RateDraws): PricedOption {
+  const n = draws.count;
+  const parts = new Map<BillPart, Float64Array>();
+  const partOf = (part: BillPart): Float64Array => {
+    let found = parts.get(part);
+    if (found === undefined) parts.set(part, (found = new Float64Array(n)));
+    return found;
+  };
+  for (const group of groupLines(option)) {
+    const P = partOf(group.part);
+    const factor = factorOf(group, option, draws);
+    for (const [item, quantity] of group.items) {
+      const R = rateOf(rates, item);
+      if (factor === null) for (let k = 0; k < n; k++) P[k] = P[k]! + quantity * R[k]!;
+      else for (let k = 0; k < n; k++) P[k] = P[k]! + quantity * R[k]! * factor[k]!;
+    }
+  }
+  for (const block of foundationBlocks(option, draws)) {
+    const P = partOf(block.part);
+    const R = rateOf(rates, block.item);
+    const C = draws.ground[block.stretch]!;
+    const Q = block.byClass;
+    for (let k = 0; k < n; k++) P[k] = P[k]! + Q[C[k]!]! * R[k]!;
+  }
+  const totals = new Float64Array(n);
+  for (const part of billParts) {
+    const P = parts.get(part);
+    if (P !== undefined) for (let k = 0; k < n; k++) totals[k] = totals[k]! + P[k]!;
+  }
+  const scratch = totals.slice();
+  const cost = {
+    p10: quantileOf(scratch, 0.1),
+    p50: quantileOf(scratch, 0.5),
+    p90: quantileOf(scratch, 0.9),
+  };
+  const quartiles: [number, number] = [quantileOf(scratch, 0.25), quantileOf(scratch, 0.75)];
+  const approaches = parts.get('approaches');
+  const without = totals.slice();
+  if (approaches !== undefined) for (let k = 0; k < n; k++) without[k] = without[k]! - approaches[k]!;
+  return {
+    totals,
+    cost,
+    quartiles,
+    parts: billParts.flatMap((part) => {
+      const P = parts.get(part);
+      return P === undefined ? [] : [{ part, p50: quantileOf(P, 0.5) }];
+    }),
+    withoutApproachesP50: quantileOf(without, 0.5),
+  };
+}
+
+/** Lines of one part that share a factor: the model error of a form, the months, or none. */
+interface Group {
+  readonly part: BillPart;
+  readonly form: FormId | null;
+  readonly monthly: boolean;
+  readonly items: Map<string, number>;
+}
+
+function groupLines(option: Priceable): Group[] {
+  const groups = new Map<string, Group>();
+  for (const line of option.lines) {
+    const form = line.unit === undefined ? null : unitForm(option, line);
+    const monthly = line.item === 'site-month';
+    const key = `${line.part} ${form ?? ''} ${monthly}`;
+    let group = groups.get(key);
+    if (group === undefined) groups.set(key, (group = { part: line.part, form, monthly, items: new Map() }));
+    group.items.set(line.item, (group.items.get(line.item) ?? 0) + line.quantity);
+  }
+  return [...groups.values()];
+}
+
+function unitForm(option: Priceable, line: MeasuredLine): FormId {
+  const unit = option.units[line.unit!];
+  if (unit === undefined) {
+    throw new RangeError(`${line.what}: expected a unit of the option, received unit ${line.unit}`);
+  }
+  return unit.form;
+}
+
+function factorOf(group: Group, option: Priceable, draws: Draws): Float64Array | null {
+  if (group.form !== null) {
+    const error = draws.modelError.get(group.form);
+    if (error === undefined) {
+      throw new RangeError(
+        `draws: expected a model error for ${group.form}, received none; draw for every form used`,
+      );
+    }
+    return error;
+  }
+  if (!group.monthly) return null;
+  const { low, high } = halfSigmas(option.months);
+  const Z = draws.drivers.productivity;
+  return Z.map((z) => Math.exp((z < 0 ? low : high) * z));
+}
+
+/** Quantity of one item of the foundations on one stretch, for each class the stretch may turn out to be. */
+interface FoundationBlock {
+  readonly stretch: number;
+  readonly part: BillPart;
+  readonly item: string;
+  readonly byClass: Float64Array;
+}
+
+function foundationBlocks(option: Priceable, draws: Draws): FoundationBlock[] {
+  const blocks = new Map<string, FoundationBlock>();
+  for (const support of option.supports) {
+    if (draws.ground[support.stretch] === undefined) {
+      throw new RangeError(
+        `support at ${support.chainageM} m: expected a ground stretch of the draws, received ${support.stretch}`,
+      );
+    }
+    support.foundations.forEach((foundation, index) => {
+      for (const line of foundation.lines) {
+        const key = `${support.stretch} ${line.part} ${line.item}`;
+        let block = blocks.get(key);
+        if (block === undefined) {
+          const byClass = new Float64Array(support.foundations.length);
+          blocks.set(key, (block = { stretch: support.stretch, part: line.part, item: line.item, byClass }));
+        }
+        if (block.byClass.length !== support.foundations.length) {
+          throw new RangeError(
+            `support at ${support.chainageM} m: expected ${block.byClass.length} foundations as on the rest of its stretch, received ${support.foundations.length}`,
+          );
+        }
+        block.byClass[index] = block.byClass[index]! + line.quantity;
+      }
+    });
+  }
+  return [...blocks.values()];
+}
+
+function rateOf(rates: RateDraws, item: string): Float64Array {
+  const found = rates.get(item);
+  if (found === undefined)
+    throw new RangeError(`rate of ${item}: expected one in the rate pack, received none`);
+  return found;
+}

@@ -1,0 +1,1 @@
+export { planProgramme, type Activity, type Programme } from './planProgramme.ts';
