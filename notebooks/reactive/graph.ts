@@ -222,8 +222,8 @@ export function graph() {
       disposed = true;
       passDue = false;
       staged.clear();
-      for (const node of nodes.values()) node.abort();
       for (const stop of [...stops]) stop();
+      for (const node of nodes.values()) node.abort();
       release();
     },
   };

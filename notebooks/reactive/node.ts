@@ -73,7 +73,7 @@ export function isMadeFrom(used: readonly Outcome<unknown>[] | undefined, above:
 export function carriedLife(life: Life, used: readonly Outcome<unknown>[] | undefined, above: Above): Life {
   if (used === undefined) return life;
   if (isLived(above.life) && isMadeFrom(used, above)) return above.life;
-  const ends = above.lives.map(({ since, until }, i) => (used[i] === above.outcomes[i] ? until : since - 1));
+  const ends = above.lives.map(({ since }, i) => (used[i] === above.outcomes[i] ? Infinity : since - 1));
   return { since: life.since, until: Math.min(life.until, ...ends) };
 }
 

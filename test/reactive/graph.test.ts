@@ -672,6 +672,8 @@ describe('turns', () => {
     g.watch(b, show);
     g.view({ a, b }, show);
     show.mockClear();
+    runs[1]!.run.report({ done: 1, of: 2, what: 'spans' });
+    expect(show).toHaveBeenCalledTimes(1);
     const settled = g.settled();
     g.set(a, 3);
     g.dispose();
@@ -682,7 +684,7 @@ describe('turns', () => {
     expect(runs).toHaveLength(2);
     expect(g.state(b)).toEqual({ state: 'pending', value: 10 });
     expect(g.state(a)).toEqual({ state: 'ready', value: 2 });
-    expect(show).not.toHaveBeenCalled();
+    expect(show).toHaveBeenCalledTimes(1);
   });
 
   it('[G13] after dispose() every change is an error that says so', () => {
@@ -796,6 +798,84 @@ describe('watches and views', () => {
       { state: 'pending' },
       { state: 'pending', value: { b: 10, c: 11 } },
       { state: 'ready', value: { b: 20, c: 21 } },
+    ]);
+  });
+
+  it('[G14] a partial result and a value that has stayed equal since meet in one view', async () => {
+    const g = graph();
+    const { runs, start } = manual<{ a: number }, number>();
+    const states: unknown[] = [];
+    const a = g.input('a', 2);
+    const b = g.cell('b', { a }, half);
+    const slow = g.slow('slow', { a }, start, { policy: 'progress' });
+    g.view({ b, slow }, (state) => states.push(state));
+    await turn();
+    g.batch(() => g.set(a, 3));
+    await runs[0]!.finish(20);
+    expect(states).toEqual([{ state: 'pending' }, { state: 'pending', value: { b: 1, slow: 20 } }]);
+  });
+
+  it('[G14] a late partial result is not shown with one of the age after it', async () => {
+    const g = graph();
+    const early = manual<object, string>();
+    const later = manual<object, string>();
+    const states: unknown[] = [];
+    const a = g.input('a', 0);
+    const b = g.slow('b', { a }, early.start, { policy: 'progress' });
+    const c = g.slow('c', { a }, later.start, { policy: 'progress' });
+    g.view({ b, c }, (state) => states.push(state.value));
+    await turn();
+    await later.runs[0]!.finish('c0');
+    g.batch(() => g.set(a, 1));
+    g.batch(() => g.set(a, 2));
+    await later.runs[1]!.finish('c1');
+    await early.runs[0]!.finish('b0');
+    await early.runs[1]!.finish('b2');
+    await later.runs[2]!.finish('c2');
+    expect(states.filter((value) => value !== undefined)).toEqual([{ b: 'b2', c: 'c2' }]);
+  });
+
+  it('[G14] a value equal again after ages nobody worked out is not shown with a result of those ages', async () => {
+    const g = graph();
+    const left = manual<object, string>();
+    const right = manual<object, string>();
+    const states: State<unknown>[] = [];
+    const a = g.input('a', 0);
+    const b = g.slow('b', { a }, left.start, { policy: 'latest' });
+    const c = g.slow('c', { a }, right.start, { policy: 'progress' });
+    g.view({ b, c }, (state) => states.push(state));
+    await turn();
+    await left.runs[0]!.finish('same');
+    await right.runs[0]!.finish('c0');
+    states.length = 0;
+    g.batch(() => g.set(a, 1));
+    g.batch(() => g.set(a, 2));
+    await left.runs[2]!.finish('same');
+    await right.runs[1]!.finish('c1');
+    await right.runs[2]!.finish('c2');
+    expect(states).toEqual([
+      { state: 'pending', value: { b: 'same', c: 'c0' } },
+      { state: 'ready', value: { b: 'same', c: 'c2' } },
+    ]);
+  });
+
+  it('[G14] an equal partial result is not told again', async () => {
+    const g = graph();
+    const { runs, start } = manual<{ a: number }, number>();
+    const states: unknown[] = [];
+    const a = g.input('a', 1);
+    const b = g.slow('b', { a }, start, { policy: 'progress' });
+    g.watch(b, (state) => states.push(state));
+    await turn();
+    for (const value of [2, 3, 4]) {
+      g.batch(() => g.set(a, value));
+      await runs.at(-1)!.finish(10);
+    }
+    await runs.at(-1)!.finish(10);
+    expect(states).toEqual([
+      { state: 'pending' },
+      { state: 'pending', value: 10 },
+      { state: 'ready', value: 10 },
     ]);
   });
 

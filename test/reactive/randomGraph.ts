@@ -23,7 +23,7 @@ export type Answer = { readonly value: number } | { readonly failed: string };
 
 /** Random graphs of up to 3 inputs and `most` cells; slow ones only when `slow` is set. */
 export function randomGraph(most: number, slow: boolean): Arbitrary<RandomGraph> {
-  const kinds = slow ? (['cell', 'latest', 'progress'] as const) : (['cell'] as const);
+  const kinds = slow ? (['cell', 'latest', 'progress', 'progress'] as const) : (['cell'] as const);
   const cell = fc.record({
     kind: fc.constantFrom(...kinds),
     picks: fc.array(fc.nat(), { minLength: 1, maxLength: 3 }),
