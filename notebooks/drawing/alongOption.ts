@@ -1,0 +1,103 @@
+import type { AppraisedOption, Design, Site, Unit, WorkedOption } from '../model.ts';
+
+/** Straight-line reading of a table at x; the end values hold outside it. Empty tables give NaN. */
+export function readAt(xs: readonly number[], ys: readonly number[], x: number): number {
+  const last = xs.length - 1;
+  if (last < 0) return NaN;
+  if (x <= (xs[0] ?? 0)) return ys[0] ?? NaN;
+  for (let i = 1; i <= last; i += 1) {
+    const right = xs[i] ?? 0;
+    if (x <= right) {
+      const left = xs[i - 1] ?? 0;
+      const part = right > left ? (x - left) / (right - left) : 1;
+      return (ys[i - 1] ?? NaN) * (1 - part) + (ys[i] ?? NaN) * part;
+    }
+  }
+  return ys[last] ?? NaN;
+}
+
+/** Level of the ground or bed at a chainage, m. */
+export const groundLevel = (site: Site, chainageM: number): number =>
+  readAt(site.groundX, site.groundZ, chainageM);
+
+/** Finished road level, m; the road runs straight between the abutments and on beyond them. */
+export function roadLevel(site: Site, option: WorkedOption, chainageM: number): number {
+  const { startLevelM, endLevelM } = option.profile;
+  return startLevelM + ((endLevelM - startLevelM) * (chainageM - site.startM)) / site.lengthM;
+}
+
+/** Top of the structural slab on the road line, m. */
+export const slabLevel = (site: Site, option: WorkedOption, chainageM: number): number =>
+  roadLevel(site, option, chainageM) - site.deck.surfacingM;
+
+/** Units with their designs and the chainage at which their x starts. */
+export interface PlacedUnit {
+  readonly unit: Unit;
+  readonly design: Design;
+  readonly fromM: number;
+  readonly toM: number;
+}
+
+/** Units of an option in order of chainage. A unit without a design is left out. */
+export function placedUnits(option: WorkedOption): PlacedUnit[] {
+  return option.units.flatMap((unit, index) => {
+    const design = option.designs[index];
+    const fromM = unit.supportsM[0];
+    const toM = unit.supportsM[unit.supportsM.length - 1];
+    return design === undefined || fromM === undefined || toM === undefined
+      ? []
+      : [{ unit, design, fromM, toM }];
+  });
+}
+
+/** Structural depth at a chainage, m; NaN off the bridge. Where two units meet the deeper one holds. */
+export function depthAt(option: WorkedOption, chainageM: number): number {
+  let depth = NaN;
+  for (const { design, fromM, toM } of placedUnits(option)) {
+    if (chainageM < fromM - 1e-6 || chainageM > toM + 1e-6) continue;
+    const here = readAt(design.depthAlong.xM, design.depthAlong.depthM, chainageM - fromM);
+    if (!(depth >= here)) depth = here;
+  }
+  return depth;
+}
+
+/** Soffit level at a chainage, m; NaN off the bridge. */
+export const soffitLevel = (site: Site, option: WorkedOption, chainageM: number): number =>
+  slabLevel(site, option, chainageM) - depthAt(option, chainageM);
+
+/** Highest of the lowest soffits allowed at a chainage, m; NaN where nothing limits it. */
+export function leastSoffit(site: Site, chainageM: number): number {
+  let least = NaN;
+  for (const limit of site.soffitLimits) {
+    if (chainageM < limit.fromM || chainageM > limit.toM) continue;
+    if (!(least >= limit.levelM)) least = limit.levelM;
+  }
+  return least;
+}
+
+/** Chainages of all supports in order, each once, m. */
+export function supportChainages(option: WorkedOption): number[] {
+  const all = option.units.flatMap((unit) => unit.supportsM).sort((a, b) => a - b);
+  return all.filter((at, index) => index === 0 || at - (all[index - 1] ?? 0) > 0.05);
+}
+
+/** Spans of the whole option, m. */
+export function spansOf(option: WorkedOption): number[] {
+  const at = supportChainages(option);
+  return at.slice(1).map((chainageM, index) => chainageM - (at[index] ?? 0));
+}
+
+/** Names on the bearing bubbles: A, P1, P2 ... B. */
+export const supportName = (index: number, count: number): string =>
+  index === 0 ? 'A' : index === count - 1 ? 'B' : `P${String(index)}`;
+
+/** Highest and lowest level of anything an option draws above its foundations, m. */
+export function structureTop(site: Site, option: AppraisedOption): number {
+  let top = Math.max(option.profile.startLevelM, option.profile.endLevelM) + 1.1;
+  for (const { design, fromM } of placedUnits(option)) {
+    for (const shape of design.elevation) {
+      for (const [x, z] of shape.points) top = Math.max(top, slabLevel(site, option, fromM + x) + z);
+    }
+  }
+  return top;
+}

@@ -1,0 +1,197 @@
+import type { Obstacle, Site } from '../model.ts';
+import { groundLevel } from './alongOption.ts';
+import { dimensionChain, uprightDimension } from './dimension.ts';
+import type { Frame } from './frame.ts';
+import { colours, pens } from './ink.ts';
+import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
+import type { Placer } from './placer.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num, pathOf } from './piece.ts';
+import { length } from '../format.ts';
+
+/** An envelope to be kept free. */
+export interface Envelope {
+  readonly fromM: number;
+  readonly toM: number;
+  readonly footLevelM: number;
+  readonly topLevelM: number;
+  readonly railway: boolean;
+  readonly water: boolean;
+  readonly confirmed: boolean;
+}
+
+/**
+ * Envelopes of the obstacles, or, where the brief's obstacles are not given, what the site's soffit limits say: their
+ * foot is then the ground or the water under them.
+ */
+export function envelopes(site: Site, obstacles?: readonly Obstacle[]): Envelope[] {
+  if (obstacles !== undefined) {
+    return obstacles.flatMap(({ kind, clearance }) =>
+      clearance === null
+        ? []
+        : [
+            {
+              fromM: clearance.fromM,
+              toM: clearance.toM,
+              footLevelM: clearance.datumLevelM,
+              topLevelM: clearance.datumLevelM + clearance.headroomM,
+              railway: kind === 'railway',
+              water: kind === 'river',
+              confirmed: clearance.confirmed,
+            },
+          ],
+    );
+  }
+  return site.soffitLimits
+    .filter((limit) => limit.kind !== 'flood')
+    .map((limit) => {
+      const middle = (limit.fromM + limit.toM) / 2;
+      const water = site.waters.find(
+        (one) => limit.kind === 'river' && middle >= one.fromM && middle <= one.toM,
+      );
+      return {
+        fromM: limit.fromM,
+        toM: limit.toM,
+        footLevelM: water?.levelM ?? groundLevel(site, middle),
+        topLevelM: limit.levelM,
+        railway: limit.kind === 'railway',
+        water: limit.kind === 'river',
+        confirmed: true,
+      };
+    });
+}
+
+/** Outline of each envelope in the accent with its headroom; over a railway the upper corners are cut. */
+export function clearances(
+  frame: Frame,
+  list: readonly Envelope[],
+  accent: string,
+  room: Placer | null,
+): Piece {
+  return g(
+    { class: 'clearances' },
+    list.map((one) => {
+      const left = frame.x(one.fromM);
+      const right = frame.x(one.toM);
+      const top = frame.y(one.topLevelM);
+      const foot = frame.y(one.footLevelM);
+      const cut = one.railway ? Math.min(5, (right - left) / 4, (foot - top) / 3) : 0;
+      const outline = pathOf([
+        [left, foot],
+        [left, top + cut],
+        [left + cut, top],
+        [right - cut, top],
+        [right, top + cut],
+        [right, foot],
+      ]);
+      const headroom = (one.topLevelM - one.footLevelM).toFixed(2);
+      const inside = `${length(one.toM - one.fromM)} × ${headroom}`;
+      const fitsInside = one.water && right - left > textWidth(inside, 11) + 8 && foot - top > 14;
+      room?.takeLine(
+        [
+          [left, foot],
+          [left, top],
+          [right, top],
+          [right, foot],
+        ],
+        2,
+        2,
+      );
+      if (fitsInside) room?.take({ left, right, top, bottom: foot }, 2);
+      const beside = right + 7;
+      if (!fitsInside) room?.take({ left: beside - 3, right: beside + 34, top, bottom: foot }, 2);
+      return g(
+        {},
+        el('path', { d: outline, fill: 'none', stroke: accent, 'stroke-width': pens.medium }),
+        fitsInside
+          ? label((left + right) / 2, (top + foot) / 2 + 4, inside, { anchor: 'middle', fill: accent })
+          : uprightDimension(beside, top, foot, headroom, { colour: accent }),
+      );
+    }),
+  );
+}
+
+/** Where no pier may stand: an upright at each end, and between them a dimension with the words. */
+export function barredDimension(site: Site, frame: Frame, y: number, accent: string): Piece | null {
+  const opening = site.mainOpening;
+  if (opening === null) return null;
+  const left = frame.x(opening.fromM);
+  const right = frame.x(opening.toM);
+  const foot = (m: number): number => frame.y(groundLevel(site, m));
+  return g(
+    { class: 'barred' },
+    el('path', {
+      d: `M${num(left)},${num(y - 6)}V${num(foot(opening.fromM))}M${num(right)},${num(y - 6)}V${num(foot(opening.toM))}`,
+      fill: 'none',
+      stroke: accent,
+      'stroke-width': pens.fine,
+      'stroke-dasharray': '4.6 2.8',
+    }),
+    dimensionChain([left, right], y, [`${opening.widthM.toFixed(1)} no pier`], {
+      colour: accent,
+      halo: true,
+      inLine: true,
+    }),
+  );
+}
+
+/** Neighbouring hard zones run together, with one name: [from, to, words]. */
+export function barredStretches(
+  site: Site,
+): { readonly fromM: number; readonly toM: number; readonly words: string }[] {
+  const hard = site.zones.filter((zone) => zone.hard).sort((a, b) => a.fromM - b.fromM);
+  const out: { fromM: number; toM: number; words: string }[] = [];
+  for (const zone of hard) {
+    const last = out[out.length - 1];
+    if (last !== undefined && zone.fromM <= last.toM + 0.05) last.toM = Math.max(last.toM, zone.toM);
+    else out.push({ fromM: zone.fromM, toM: zone.toM, words: zone.kind === 'river' ? 'no pier' : zone.kind });
+  }
+  return out.map((stretch) =>
+    stretch.words === 'no pier'
+      ? { ...stretch, words: `no pier, ${length(stretch.toM - stretch.fromM)} m` }
+      : stretch,
+  );
+}
+
+/** Grey wash of the barred stretches over the whole height of a drawing. */
+export const barredWash = (site: Site, frame: Frame, top: number, bottom: number): Piece =>
+  g(
+    { class: 'wash' },
+    barredStretches(site).map(({ fromM, toM }) =>
+      el('rect', {
+        x: frame.x(fromM),
+        y: top,
+        width: (toM - fromM) * frame.pxPerM,
+        height: bottom - top,
+        fill: colours.wash,
+      }),
+    ),
+  );
+
+/** Accent bracket with its words on top of each barred stretch. */
+export function barredBrackets(site: Site, frame: Frame, y: number, accent: string): Piece {
+  let lastRight = -Infinity;
+  return g(
+    { class: 'brackets' },
+    barredStretches(site).map(({ fromM, toM, words }) => {
+      const left = frame.x(fromM);
+      const right = frame.x(toM);
+      const half = textWidth(words, 11) / 2;
+      const middle = (left + right) / 2;
+      // Words that would run into the ones before them stand a line higher.
+      const raised = middle - half < lastRight + 6;
+      lastRight = Math.max(lastRight, middle + half);
+      return g(
+        {},
+        el('path', {
+          d: `M${num(left)},${num(y + 6)}V${num(y)}H${num(right)}V${num(y + 6)}`,
+          fill: 'none',
+          stroke: accent,
+          'stroke-width': pens.medium,
+        }),
+        label(middle, y - (raised ? 17 : 5), words, { anchor: 'middle', fill: accent }),
+      );
+    }),
+  );
+}

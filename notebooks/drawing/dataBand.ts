@@ -1,0 +1,154 @@
+import type { AppraisedOption, Site } from '../model.ts';
+import { chainage, level, unknownMark } from '../format.ts';
+import { groundLevel, leastSoffit, roadLevel, soffitLevel, supportChainages } from './alongOption.ts';
+import type { Frame } from './frame.ts';
+import { colours, letters, pens } from './ink.ts';
+import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num } from './piece.ts';
+
+/** Height of one row, px. */
+export const bandRow = 15.2;
+
+/** Room the row names take at the left, px. */
+const nameRoom = 40;
+
+/**
+ * Chainages at which the band states its figures: supports first, then ends of limits and barred stretches, then bends
+ * of the ground, then tens; each is taken only where there is room for its figure.
+ */
+export function bandChainages(site: Site, option: AppraisedOption | null, frame: Frame): number[] {
+  const pitch = 33;
+  const ground = site.groundX.filter((x, index) => {
+    const before = site.groundX[index - 1];
+    const after = site.groundX[index + 1];
+    return before !== undefined && after !== undefined && x > site.startM && x < site.endM;
+  });
+  // Where each envelope leaves least room, the figure that decides.
+  const tightest = site.soffitLimits
+    .filter((limit) => limit.kind !== 'flood')
+    .map((limit) => {
+      const at = [(limit.fromM + limit.toM) / 2, limit.fromM, limit.toM];
+      if (option === null) return at[0] ?? limit.fromM;
+      const room = (x: number): number => soffitLevel(site, option, x) - limit.levelM;
+      return at.reduce((best, x) => (room(x) < room(best) - 0.005 ? x : best));
+    });
+  const tens: number[] = [];
+  for (let x = Math.ceil(site.startM / 10) * 10; x <= site.endM; x += 10) tens.push(x);
+  const wanted = [
+    ...(option === null ? [site.startM, site.endM] : supportChainages(option)),
+    ...tightest,
+    ...site.zones.filter((zone) => zone.hard).flatMap((zone) => [zone.fromM, zone.toM]),
+    ...ground,
+    ...tens,
+  ];
+  const taken: number[] = [];
+  for (const at of wanted) {
+    const x = frame.x(at);
+    if (at < frame.fromM || at > frame.toM || x < frame.left + nameRoom + 14 || x > frame.right - 16)
+      continue;
+    if (taken.every((other) => Math.abs(frame.x(other) - x) >= pitch)) taken.push(at);
+  }
+  return taken.sort((a, b) => a - b);
+}
+
+interface Row {
+  readonly name: string;
+  readonly figure: (chainageM: number) => string;
+  readonly value?: (chainageM: number) => number;
+  readonly bold?: boolean;
+  readonly fill?: (chainageM: number) => string;
+}
+
+export interface BandStyle {
+  readonly accent: string;
+  readonly datumM: number;
+}
+
+/**
+ * Data band under an elevation: chainage, ground, road, soffit, lowest soffit allowed and what is left of it. The least
+ * spare is bold, and in the accent where it is negative.
+ * @returns the band, its height in px and the figures as a table
+ */
+export function dataBand(
+  site: Site,
+  option: AppraisedOption | null,
+  frame: Frame,
+  y: number,
+  style: BandStyle,
+): {
+  readonly piece: Piece;
+  readonly height: number;
+  readonly table: { readonly head: string[]; readonly rows: string[][] };
+} {
+  const places = bandChainages(site, option, frame);
+  const show = (value: number): string => (Number.isFinite(value) ? level(value) : unknownMark);
+  const spare = (at: number): number =>
+    option === null ? NaN : soffitLevel(site, option, at) - leastSoffit(site, at);
+  const least = Math.min(...places.map(spare).filter(Number.isFinite));
+  const limited = places.some((at) => Number.isFinite(leastSoffit(site, at)));
+  const rows: Row[] = [
+    { name: 'ch', figure: chainage, bold: true },
+    { name: 'ground', figure: (at) => show(groundLevel(site, at)) },
+  ];
+  if (option !== null) {
+    rows.push(
+      { name: 'road', figure: (at) => show(roadLevel(site, option, at)) },
+      { name: 'soffit', figure: (at) => show(soffitLevel(site, option, at)) },
+    );
+  }
+  if (limited) {
+    rows.push({
+      name: 'at least',
+      figure: (at) => show(leastSoffit(site, at)),
+      fill: (at) => (Number.isFinite(leastSoffit(site, at)) ? style.accent : colours.second),
+    });
+    if (option !== null)
+      rows.push({
+        name: 'spare',
+        figure: (at) => show(spare(at)),
+        value: spare,
+        fill: (at) => (spare(at) < -0.005 ? style.accent : colours.ink),
+      });
+  }
+  const height = rows.length * bandRow;
+  const line = (at: number, stroke: string, width: number): Piece =>
+    el('path', { d: `M${num(frame.left)},${num(at)}H${num(frame.right)}`, stroke, 'stroke-width': width });
+  const piece = g(
+    { class: 'band' },
+    label(frame.left + 2, y - 6, `datum ${level(style.datumM)}`, { fill: colours.second, halo: true }),
+    line(y, colours.ink, pens.medium),
+    el('path', {
+      d: places.map((at) => `M${num(frame.x(at))},${num(y - 4)}v4`).join(''),
+      stroke: colours.ink,
+      'stroke-width': pens.thin,
+    }),
+    rows.map((row, index) => {
+      const base = y + (index + 1) * bandRow - 4;
+      return g(
+        {},
+        index > 0 && line(y + index * bandRow, colours.rule, pens.fine),
+        label(frame.left + 2, base, row.name, { fill: colours.second, size: letters.drawing }),
+        places.map((at) => {
+          const isLeast = row.value !== undefined && Math.abs(row.value(at) - least) < 0.005;
+          return label(frame.x(at), base, row.figure(at), {
+            anchor: 'middle',
+            weight: row.bold === true || isLeast ? 600 : 400,
+            fill: row.fill?.(at) ?? colours.ink,
+          });
+        }),
+      );
+    }),
+    line(y + height, colours.ink, pens.medium),
+  );
+  return {
+    piece,
+    height,
+    table: { head: rows.map((row) => row.name), rows: places.map((at) => rows.map((row) => row.figure(at))) },
+  };
+}
+
+/** Room the widest chainage needs, px. */
+export const bandPitch = (chainageM: number): number =>
+  textWidth(chainage(chainageM), letters.drawing, 600) + 6;

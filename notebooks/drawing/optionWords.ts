@@ -1,0 +1,49 @@
+import { length, level } from '../format.ts';
+import { formLooks } from '../forms/formLook.ts';
+import type { AppraisedOption, FormId } from '../model.ts';
+import { depthAt, placedUnits, spansOf, structureTop } from './alongOption.ts';
+import type { Site } from '../model.ts';
+
+/** Whether an option's main unit is deeper at its supports than at midspan. */
+export const isHaunched = (option: AppraisedOption): boolean =>
+  option.depthM.support > option.depthM.midspan + 0.05;
+
+/** Heading of an option: the form, haunched where it is, and the form of its approaches where that is another. */
+export function optionTitle(option: AppraisedOption): string {
+  const look = formLooks[option.form];
+  const haunchSaid =
+    option.form === 'cantilever-box' || option.form === 'portal-frame' || option.form === 'extradosed';
+  const approaches = new Set<FormId>(
+    option.units
+      .filter((unit) => unit.role === 'approach' && unit.form !== option.form)
+      .map((unit) => unit.form),
+  );
+  const beside = [...approaches].map(
+    (form) => `${formLooks[form].short.charAt(0).toLowerCase()}${formLooks[form].short.slice(1)} approaches`,
+  );
+  return [look.name, ...(isHaunched(option) && !haunchSaid ? ['haunched'] : []), ...beside].join(', ');
+}
+
+/** What is worth knowing of an option beside its spans: its depth, what stands above the road, how the road moves. */
+export function optionNote(site: Site, option: AppraisedOption): string {
+  const { support, midspan } = option.depthM;
+  const depth = isHaunched(option)
+    ? `${level(midspan)} m at midspan, ${level(support)} m at piers`
+    : `${level(midspan)} m deep`;
+  const above = structureTop(site, option) - Math.max(option.profile.startLevelM, option.profile.endLevelM);
+  const tall = above > 4 ? `, ${length(Math.round(above))} m above the road` : '';
+  const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
+  const moved =
+    rise > 0.005 ? `; road ${level(rise)} m higher` : rise < -0.005 ? `; road ${level(-rise)} m lower` : '';
+  return `${depth}${tall}${moved}`;
+}
+
+/** Index of the longest span, which is printed bold. */
+export const mainSpan = (option: AppraisedOption): number => {
+  const spans = spansOf(option);
+  return spans.indexOf(Math.max(...spans));
+};
+
+/** Whether an option has a worked-out deck to draw. */
+export const isDrawn = (option: AppraisedOption): boolean =>
+  placedUnits(option).some(({ fromM }) => Number.isFinite(depthAt(option, fromM)));

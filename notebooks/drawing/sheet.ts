@@ -1,0 +1,35 @@
+import { colours, letters } from './ink.ts';
+import type { Child, Piece } from './piece.ts';
+import { el } from './piece.ts';
+
+/** The bundled lettering, with what stands in for it in a drawing opened elsewhere. */
+export const lettering = "'Overpass Variable', Overpass, 'DejaVu Sans', sans-serif";
+
+/**
+ * Root of a drawing: true size in px (96 to the inch), named for readers who cannot see it.
+ * @param role `img` for a drawing as a whole; `group` where parts of it can be chosen
+ */
+export function sheet(
+  width: number,
+  height: number,
+  name: string,
+  children: readonly Child[],
+  role: 'img' | 'group' = 'img',
+  className = 'drawing',
+): Piece {
+  return el(
+    'svg',
+    {
+      class: className,
+      width,
+      height,
+      viewBox: `0 0 ${String(Math.round(width * 100) / 100)} ${String(Math.round(height * 100) / 100)}`,
+      role,
+      'aria-label': name,
+      'font-family': lettering,
+      'font-size': letters.drawing,
+      fill: colours.ink,
+    },
+    ...children,
+  );
+}

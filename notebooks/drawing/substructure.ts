@@ -1,0 +1,252 @@
+import type { AppraisedOption, Foundation, Site, Support } from '../model.ts';
+import { groundLevel, roadLevel, soffitLevel } from './alongOption.ts';
+import type { Frame } from './frame.ts';
+import { colours, pens } from './ink.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num, pathOf } from './piece.ts';
+
+/** The foundation of the likeliest ground class; null when none is given. */
+export function likeliest(support: Support): Foundation | null {
+  return support.foundations.reduce<Foundation | null>(
+    (best, one) => (best === null || one.odds > best.odds ? one : best),
+    null,
+  );
+}
+
+/** Level of the underside of a foundation: pile toe, or underside of the footing, m. */
+export const toeLevel = (foundation: Foundation): number =>
+  foundation.piles === null
+    ? foundation.footing.topLevelM - foundation.footing.depthM
+    : foundation.piles.toeLevelM;
+
+/** How far the other ground classes put the underside from the likeliest one, m; 0 with one class only. */
+export function toeSpread(support: Support): number {
+  const main = likeliest(support);
+  if (main === null) return 0;
+  return Math.max(0, ...support.foundations.map((one) => Math.abs(toeLevel(one) - toeLevel(main))));
+}
+
+const box = (frame: Frame, left: number, right: number, top: number, bottom: number): string =>
+  `M${num(frame.x(left))},${num(frame.y(top))}H${num(frame.x(right))}V${num(frame.y(bottom))}H${num(frame.x(left))}Z`;
+
+/** Piles seen in elevation: as many as stand in one row along the road. */
+function pileRow(foundation: Foundation): number {
+  const piles = foundation.piles;
+  if (piles === null) return 0;
+  const { lengthM, widthM } = foundation.footing;
+  const along = Math.round(Math.sqrt((piles.count * lengthM) / Math.max(widthM, 0.1)));
+  const fits = Math.max(1, Math.floor(lengthM / (piles.diameterM * 1.25)));
+  return Math.max(1, Math.min(along, fits, piles.count));
+}
+
+export interface SubstructureStyle {
+  /** Piles are cut with a break line below this level, m. */
+  readonly cutBelowM?: number;
+  /** Narrow sheets leave foundations out. */
+  readonly foundations?: boolean;
+}
+
+function foundationPiece(foundation: Foundation, atM: number, frame: Frame, style: SubstructureStyle): Piece {
+  const { footing, piles } = foundation;
+  const underside = footing.topLevelM - footing.depthM;
+  const cut = style.cutBelowM ?? -Infinity;
+  const parts: Piece[] = [];
+  if (piles !== null) {
+    const count = pileRow(foundation);
+    const pitch = count > 1 ? (footing.lengthM - piles.diameterM * 1.5) / (count - 1) : 0;
+    const toe = Math.max(piles.toeLevelM, cut);
+    const isCut = toe > piles.toeLevelM + 0.01;
+    let bodies = '';
+    let centres = '';
+    let toes = '';
+    for (let i = 0; i < count; i += 1) {
+      const x = atM + (i - (count - 1) / 2) * pitch;
+      const left = frame.x(x - piles.diameterM / 2);
+      const right = frame.x(x + piles.diameterM / 2);
+      const top = frame.y(underside);
+      const bottom = frame.y(toe);
+      bodies += `M${num(left)},${num(top)}V${num(bottom)}M${num(right)},${num(top)}V${num(bottom)}`;
+      toes += isCut
+        ? `M${num(left - 1.5)},${num(bottom + 1)}l${num((right - left + 3) / 2 - 1)},0l1,-2.4l1,2.4h${num((right - left + 3) / 2 - 1)}`
+        : `M${num(left)},${num(bottom)}H${num(right)}`;
+      centres += `M${num((left + right) / 2)},${num(top + 2)}V${num(bottom + 4)}`;
+    }
+    const half = (pitch * (count - 1) + piles.diameterM) / 2;
+    parts.push(
+      el('path', {
+        d: box(frame, atM - half, atM + half, underside, toe),
+        fill: colours.sheet,
+        stroke: 'none',
+      }),
+      el('path', {
+        d: centres,
+        stroke: colours.third,
+        'stroke-width': 0.5,
+        'stroke-dasharray': '5 1.6 1.2 1.6',
+      }),
+      el('path', { d: bodies + toes, 'stroke-width': pens.fine }),
+    );
+  }
+  parts.push(
+    el('path', {
+      d: box(frame, atM - footing.lengthM / 2, atM + footing.lengthM / 2, footing.topLevelM, underside),
+      fill: colours.sheet,
+      'stroke-width': pens.thin,
+    }),
+  );
+  return g({}, parts);
+}
+
+function pier(
+  site: Site,
+  option: AppraisedOption,
+  support: Support,
+  frame: Frame,
+  style: SubstructureStyle,
+): Piece {
+  const foundation = likeliest(support);
+  const at = support.chainageM;
+  const half = support.shaft.lengthM / 2;
+  const foot = foundation?.footing.topLevelM ?? support.groundLevelM;
+  const soffit = soffitLevel(site, option, at);
+  const gap = Number.isFinite(soffit) ? soffit - support.topLevelM : 0;
+  const bearing = Math.min(half, 0.6);
+  return g(
+    {},
+    style.foundations !== false && foundation !== null && foundationPiece(foundation, at, frame, style),
+    el('path', {
+      d: box(
+        frame,
+        at - half,
+        at + half,
+        support.topLevelM,
+        style.foundations === false ? support.groundLevelM : foot,
+      ),
+      fill: colours.sheet,
+      'stroke-width': pens.thin,
+    }),
+    gap > 0.05 &&
+      gap < 3 &&
+      el('path', {
+        d: box(frame, at - bearing, at + bearing, soffit, support.topLevelM),
+        fill: colours.ink,
+        stroke: 'none',
+      }),
+  );
+}
+
+/** Broken level strokes 5.2 px apart between the road and the ground behind an abutment: fill as it is laid. */
+function fillStrokes(site: Site, option: AppraisedOption, frame: Frame, fromM: number, toM: number): string {
+  const step = 1 / frame.pxPerM;
+  const top = Math.max(roadLevel(site, option, fromM), roadLevel(site, option, toM));
+  const least = Math.min(...site.groundZ);
+  let d = '';
+  let row = 0;
+  for (let level = top - 5.2 / frame.pxPerM; level > least; level -= 5.2 / frame.pxPerM, row += 1) {
+    let open = NaN;
+    for (let x = fromM + (row % 2) * 4 * step; x <= toM + step; x += step) {
+      const inside =
+        x <= toM && level < roadLevel(site, option, x) - 0.3 && level > groundLevel(site, x) + 0.2;
+      if (inside && !(open <= x)) open = x;
+      const long = 12 * step;
+      if ((!inside || x - open >= long) && open <= x) {
+        if (x - open > 3 * step) d += `M${num(frame.x(open))},${num(frame.y(level))}H${num(frame.x(x))}`;
+        open = NaN;
+        if (inside) x += 5 * step;
+      }
+    }
+  }
+  return d;
+}
+
+function abutment(
+  site: Site,
+  option: AppraisedOption,
+  support: Support,
+  frame: Frame,
+  style: SubstructureStyle,
+  side: -1 | 1,
+): Piece {
+  const foundation = likeliest(support);
+  const at = support.chainageM;
+  const thick = Math.max(support.shaft.lengthM, 0.8);
+  const foot = foundation?.footing.topLevelM ?? support.groundLevelM;
+  const seat = support.topLevelM;
+  const road = roadLevel(site, option, at);
+  // Away from the bridge is `side`; the back wall stands behind the bearings, the wing reaches back to where its slope meets the road.
+  const front = at - side * Math.min(0.8, thick / 2);
+  const back = front + side * thick;
+  const wall = back - side * 0.5;
+  const height = Math.max(0, road - Math.max(support.groundLevelM, foot));
+  const wing = side * Math.min(Math.max(height, 2), 9);
+  const points = (
+    [
+      [front, foot],
+      [front, seat],
+      [wall, seat],
+      [wall, road],
+      [back, road],
+      [back, foot],
+    ] as const
+  ).map(([x, z]) => [frame.x(x), frame.y(z)] as const);
+  const soffit = soffitLevel(site, option, at);
+  const end =
+    side < 0
+      ? Math.max(frame.fromM, site.groundX[0] ?? frame.fromM)
+      : Math.min(frame.toM, site.groundX[site.groundX.length - 1] ?? frame.toM);
+  const from = Math.min(back, end);
+  const to = Math.max(back, end);
+  return g(
+    {},
+    style.foundations !== false &&
+      to > from &&
+      el('path', {
+        d: fillStrokes(site, option, frame, from, to),
+        stroke: colours.third,
+        'stroke-width': pens.fine,
+      }),
+    style.foundations !== false &&
+      foundation !== null &&
+      foundationPiece(foundation, (front + back) / 2, frame, style),
+    el('path', {
+      d: pathOf([
+        [frame.x(back + wing), frame.y(road - 0.1)],
+        [frame.x(back + wing), frame.y(road - 0.7)],
+        [frame.x(back), frame.y(road - Math.min(height, 9))],
+      ]),
+      stroke: colours.second,
+      'stroke-width': pens.fine,
+    }),
+    el('path', { d: pathOf(points, true), fill: colours.sheet, 'stroke-width': pens.thin }),
+    soffit > seat + 0.05 &&
+      el('path', { d: box(frame, at - 0.4, at + 0.4, soffit, seat), fill: colours.ink, stroke: 'none' }),
+    // The road goes on behind the abutment, on the fill or on the ground.
+    el('path', {
+      d: pathOf([
+        [frame.x(back), frame.y(road)],
+        [
+          side < 0 ? frame.left : frame.right,
+          frame.y(roadLevel(site, option, side < 0 ? frame.fromM : frame.toM)),
+        ],
+      ]),
+      'stroke-width': pens.medium,
+    }),
+  );
+}
+
+/** Piers, abutments and their likeliest foundations. Pylons above the road belong to the superstructure. */
+export function substructure(
+  site: Site,
+  option: AppraisedOption,
+  frame: Frame,
+  style: SubstructureStyle = {},
+): Piece {
+  return g(
+    { class: 'substructure', fill: 'none', stroke: colours.ink },
+    option.supports.map((support, index) =>
+      support.kind === 'abutment'
+        ? abutment(site, option, support, frame, style, index === 0 ? -1 : 1)
+        : pier(site, option, support, frame, style),
+    ),
+  );
+}

@@ -1,0 +1,173 @@
+import type { FormInk } from '../forms/formInk.ts';
+import type { AppraisedOption, Shape, Site } from '../model.ts';
+import type { PlacedUnit } from './alongOption.ts';
+import { placedUnits, readAt, roadLevel, slabLevel } from './alongOption.ts';
+import type { Frame } from './frame.ts';
+import { colours, pens } from './ink.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num, pathOf } from './piece.ts';
+
+type XY = readonly [number, number];
+
+/** Thinner than this a face is drawn solid, px. */
+const solidBelowPx = 2.2;
+
+/** Height of a polygon's face, px: its area over its extent along the bridge. */
+function faceThickness(points: readonly XY[]): number {
+  let area = 0;
+  let least = Infinity;
+  let most = -Infinity;
+  points.forEach(([x, y], index) => {
+    const [nx, ny] = points[(index + 1) % points.length] ?? [x, y];
+    area += x * ny - nx * y;
+    least = Math.min(least, x);
+    most = Math.max(most, x);
+  });
+  return most > least ? Math.abs(area / 2) / (most - least) : Infinity;
+}
+
+function shapePiece(
+  shape: Shape,
+  points: readonly XY[],
+  holes: readonly (readonly XY[])[],
+  placed: PlacedUnit,
+  ink: FormInk,
+  frame: Frame,
+  plain: boolean,
+): Piece | null {
+  const line = ink.line(placed.unit.form);
+  const isCable = shape.material === 'stay' || shape.material === 'strand';
+  if (shape.faint === true) {
+    if (plain) return null;
+    return el('path', {
+      d: pathOf(points, shape.kind === 'polygon'),
+      fill: 'none',
+      stroke: line,
+      'stroke-width': 0.55,
+    });
+  }
+  if (shape.kind === 'line') {
+    const width = Math.max((shape.thicknessM ?? 0) * frame.pxPerM, isCable ? pens.fine : pens.thin);
+    return el('path', {
+      d: pathOf(points),
+      fill: 'none',
+      stroke: line,
+      'stroke-width': width,
+      'stroke-linejoin': 'round',
+    });
+  }
+  const d = pathOf(points, true) + holes.map((hole) => pathOf(hole, true)).join('');
+  const thin = faceThickness(points) < solidBelowPx;
+  return el('path', {
+    d,
+    fill: thin || plain ? line : ink.face(placed.unit.form),
+    'fill-rule': 'evenodd',
+    stroke: line,
+    'stroke-width': thin || plain ? 0.5 : pens.thin,
+    'stroke-linejoin': 'round',
+  });
+}
+
+function unitPiece(
+  site: Site,
+  option: AppraisedOption,
+  placed: PlacedUnit,
+  ink: FormInk,
+  frame: Frame,
+  plain: boolean,
+): Piece {
+  const toSheet = ([x, z]: XY): XY => [
+    frame.x(placed.fromM + x),
+    frame.y(slabLevel(site, option, placed.fromM + x) + z),
+  ];
+  const { design } = placed;
+  // Members above or beside the deck stand behind it; the deck face comes last but for its faint lines.
+  const order = (shape: Shape): number => (shape.faint === true ? 3 : shape.kind === 'line' ? 1 : 2);
+  const shapes = [...design.elevation].sort((a, b) => order(a) - order(b));
+  return g(
+    { 'data-form': placed.unit.form },
+    shapes.map((shape) =>
+      shapePiece(
+        shape,
+        shape.points.map(toSheet),
+        (shape.holes ?? []).map((hole) => hole.map(toSheet)),
+        placed,
+        ink,
+        frame,
+        plain,
+      ),
+    ),
+  );
+}
+
+/** The underside as one firm line, from the depth along each unit. */
+function soffitLine(
+  site: Site,
+  option: AppraisedOption,
+  placed: PlacedUnit,
+  ink: FormInk,
+  frame: Frame,
+): Piece {
+  const { xM, depthM } = placed.design.depthAlong;
+  const points = xM.map(
+    (x) =>
+      [
+        frame.x(placed.fromM + x),
+        frame.y(slabLevel(site, option, placed.fromM + x) - readAt(xM, depthM, x)),
+      ] as const,
+  );
+  return el('path', {
+    d: pathOf(points),
+    fill: 'none',
+    stroke: ink.line(placed.unit.form),
+    'stroke-width': 1.7,
+    'stroke-linejoin': 'round',
+  });
+}
+
+export interface SuperstructureStyle {
+  /** Solid decks without inner lines, for small scales. */
+  readonly plain?: boolean;
+  /** Posts of the parapet every so many metres; 0 leaves them out. */
+  readonly postsM?: number;
+}
+
+/** Decks, trusses, arches, pylons and stays of all units, the soffit line, the road line and the parapet. */
+export function superstructure(
+  site: Site,
+  option: AppraisedOption,
+  frame: Frame,
+  ink: FormInk,
+  style: SuperstructureStyle = {},
+): Piece {
+  const units = placedUnits(option);
+  const plain = style.plain === true;
+  const from = site.startM;
+  const to = site.endM;
+  const road = (x: number, rise = 0): XY => [frame.x(x), frame.y(roadLevel(site, option, x) + rise)];
+  const over = Math.min(6, (frame.toM - to) / 2);
+  const posts = style.postsM ?? 0;
+  let postLines = '';
+  if (posts > 0) {
+    for (let x = from; x <= to + 1e-6; x += posts)
+      postLines += `M${num(frame.x(x))},${num(frame.y(roadLevel(site, option, x) + 1.1))}V${num(frame.y(roadLevel(site, option, x)))}`;
+  }
+  return g(
+    { class: 'superstructure' },
+    units.map((placed) => unitPiece(site, option, placed, ink, frame, plain)),
+    !plain && units.map((placed) => soffitLine(site, option, placed, ink, frame)),
+    el('path', {
+      d: pathOf([road(from), road(to)]),
+      fill: 'none',
+      stroke: colours.ink,
+      'stroke-width': pens.fine,
+    }),
+    !plain &&
+      el('path', {
+        d: pathOf([road(from - over, 1.1), road(to + over, 1.1)]) + postLines,
+        fill: 'none',
+        stroke: colours.second,
+        'stroke-width': pens.fine,
+      }),
+  );
+}
