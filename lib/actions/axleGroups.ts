@@ -5,11 +5,12 @@ import { loadStandard, type LoadStandard } from './loadStandard.ts';
 /** Vehicles of a standard as axle groups with dynamic allowance, both ways round, made once. */
 export interface StandardGroups {
   readonly usual: readonly AxleGroup[];
-  /** Longer wheelbases, for hogging moments. */
+  /** Longer wheelbases, for hogging moments, and the weight of the heaviest. */
   readonly longer: readonly AxleGroup[];
-  /** The vehicle of the two-vehicle rule, both ways round, with the distance between first axles; null without such a rule. */
+  readonly longerKN: number;
+  /** The vehicles of the two-vehicle rule, with the distance between first axles; null without such a rule. */
   readonly two: {
-    readonly groups: readonly AxleGroup[];
+    readonly groups: ReadonlySet<AxleGroup>;
     readonly apartM: number;
     readonly share: number;
   } | null;
@@ -38,9 +39,10 @@ export function axleGroups(id: StandardId): StandardGroups {
   const groups: StandardGroups = {
     usual: usual.flatMap((vehicle) => vehicle.groups),
     longer,
+    longerKN: Math.max(0, ...longer.map((group) => group.loadKN.reduce((sum, load) => sum + load, 0))),
     two:
       rule && pair
-        ? { groups: pair.groups, apartM: lengthM(pair.groups[0]!) + rule.clearM, share: rule.share }
+        ? { groups: new Set(pair.groups), apartM: lengthM(pair.groups[0]!) + rule.clearM, share: rule.share }
         : null,
   };
   made.set(id, groups);

@@ -2,7 +2,7 @@ export { loadStandard, type LoadStandard } from './loadStandard.ts';
 export { notionalLanes, type NotionalLanes } from './notionalLanes.ts';
 export { serviceTraffic, type LongSpanLoad, type TrafficLoad } from './trafficLoad.ts';
 export { trafficOnDeck } from './trafficOnDeck.ts';
-export { fatigueOnCrossLine, trafficOnCrossLine } from './trafficOnCrossLine.ts';
+export { trafficOnCrossLine, worstLaneShare } from './trafficOnCrossLine.ts';
 export type { CrossLine } from './crossLine.ts';
 export { rigidCrossbeam, trafficOnGirder } from './trafficOnGirder.ts';
 export { trafficTorsion, type TrafficTorsion } from './trafficTorsion.ts';

@@ -66,7 +66,9 @@ export function trafficEnvelope(
   const shear = (s: number): void => {
     line.set(Q);
     addLoadShear(line, s);
-    beyond = trafficOnLine(shearLoad, track, line, { ...plainQuest, jumpAt: s }, out) || beyond;
+    beyond =
+      trafficOnLine(shearLoad, track, line, { section: s, hogging: false, innerReaction: false }, out) ||
+      beyond;
     result.shearMaxKN[s] = Math.max(result.shearMaxKN[s]!, out.max);
     result.shearMinKN[s] = Math.min(result.shearMinKN[s]!, out.min);
   };
@@ -76,7 +78,7 @@ export function trafficEnvelope(
     for (let i = 0; i < line.length; i++) line[i] = x * Q[i]! - T[i]!;
     addLoadMoment(line, xM, s);
     // Along a span the hogging part has the same sign as under a uniform load (points of contraflexure).
-    const quest = { jumpAt: -1, hogging: hogs[s]! < -1e-9 * x * x, innerReaction: false };
+    const quest = { section: s, hogging: hogs[s]! < -1e-9 * x * x, innerReaction: false };
     beyond = trafficOnLine(load, track, line, quest, out) || beyond;
     result.momentMaxKNm[s] = out.max;
     result.momentMinKNm[s] = out.min;
@@ -93,7 +95,7 @@ export function trafficEnvelope(
   const supports = beam.supportAt.length;
   at.forEach((station, j) => {
     const inner = station > 0 && station < n - 1;
-    const quest = { jumpAt: -1, hogging: false, innerReaction: inner && j < supports };
+    const quest = { section: -1, hogging: false, innerReaction: inner && j < supports };
     beyond = trafficOnLine(shearLoad, track, beam.reactionLines[j]!, quest, out) || beyond;
     const [max, min] =
       j < supports ? [result.reactionMaxKN, result.reactionMinKN] : [result.springMaxKN, result.springMinKN];

@@ -32,21 +32,15 @@ export function trafficOnCrossLine(
 }
 
 /**
- * The standard's fatigue traffic on such a member: every lane at the shares of `factors.fatigue` where these hold for
- * uniform loads too (EN 1991-2 4.6.2), otherwise one vehicle in the worst lane without the presence factor
- * (AASHTO LRFD 3.6.1.4), both from memory.
+ * Share of one vehicle that a member takes from the worst notional lane, presence factor aside: for fatigue, where one
+ * lane carries the lorries.
  */
-export function fatigueOnCrossLine(id: StandardId, deck: DeckSpec, line: CrossLine): TrafficLoad {
+export function worstLaneShare(id: StandardId, deck: DeckSpec, line: CrossLine): number {
   const standard = loadStandard(id);
-  const { fatigue } = standard.factors;
-  if (fatigue.uniform > 0) {
-    const all = trafficOnCrossLine(id, deck, line);
-    return scaled(all, fatigue.vehicle, fatigue.uniform);
-  }
   const laneM = Math.min(standard.lanes.widthM, deck.carriagewayM);
   const play = (deck.carriagewayM - laneM) / 2;
   const [presence = 1] = standard.lanes.multiplePresence;
-  let worst: TrafficLoad | null = null;
+  let worst = 0;
   for (const side of [-1, 0, 1]) {
     const lane = {
       ...deck,
@@ -54,21 +48,7 @@ export function fatigueOnCrossLine(id: StandardId, deck: DeckSpec, line: CrossLi
       carriagewayOffsetM: deck.carriagewayOffsetM + side * play,
       footwayM: 0,
     };
-    const one = trafficOnCrossLine(id, lane, line);
-    if (worst === null || one.vehicleFactor > worst.vehicleFactor) worst = one;
+    worst = Math.max(worst, trafficOnCrossLine(id, lane, line).vehicleFactor / presence);
   }
-  const allowance = (1 + fatigueDynamicAllowance) / (1 + standard.dynamicAllowance);
-  return scaled(worst!, (fatigue.vehicle / presence) * allowance, 0);
-}
-
-/** AASHTO LRFD table 3.6.2.1-1, from memory. */
-const fatigueDynamicAllowance = 0.15;
-
-function scaled(load: TrafficLoad, vehicle: number, uniform: number): TrafficLoad {
-  return {
-    ...load,
-    vehicleFactor: load.vehicleFactor * vehicle,
-    udlKNm: load.udlKNm * uniform,
-    footwayKNm: 0,
-  };
+  return worst;
 }

@@ -12,15 +12,15 @@ import type { LongSpanLoad, TrafficLoad } from './trafficLoad.ts';
 
 /** What of a line is looked for. */
 export interface LineQuest {
-  /** Station where the line jumps, or -1. */
-  readonly jumpAt: number;
+  /** Station of the section of a moment or shear, where the line has its peak or jump; -1 for other lines. */
+  readonly section: number;
   /** Hogging moment: longer wheelbases and two vehicles count towards the least value. */
   readonly hogging: boolean;
   /** Reaction of an inner support: two vehicles count towards the greatest value. */
   readonly innerReaction: boolean;
 }
 
-export const plainQuest: LineQuest = { jumpAt: -1, hogging: false, innerReaction: false };
+export const plainQuest: LineQuest = { section: -1, hogging: false, innerReaction: false };
 
 const areas: LineAreas = { positive: 0, negative: 0, positiveM: 0, negativeM: 0 };
 const run: Extremes = { max: 0, min: 0 };
@@ -41,33 +41,35 @@ export function trafficOnLine(
   const groups = axleGroups(load.standard);
   lineAreas(track.xM, line, areas);
   const { positive, negative, positiveM, negativeM } = areas;
+  const { two } = groups;
   let max = 0;
   let min = 0;
+  let pairMax = 0;
+  let pairMin = 0;
   for (const group of groups.usual) {
-    runGroup(track, group, line, quest.jumpAt, run);
+    const placings = runGroup(track, group, line, quest.section, run);
     max = Math.max(max, run.max);
     min = Math.min(min, run.min);
+    if (two?.groups.has(group)) {
+      if (quest.hogging)
+        pairMin = Math.min(pairMin, runTwoGroups(track, group, placings, line, two.apartM, -1));
+      if (quest.innerReaction)
+        pairMax = Math.max(pairMax, runTwoGroups(track, group, placings, line, two.apartM, 1));
+    }
   }
-  if (quest.hogging) {
+  const { vehicleFactor, udlKNm } = load;
+  const pairShare = two?.share ?? 0;
+  const pairLeast = pairShare * (vehicleFactor * pairMin + udlKNm * negative);
+  if (quest.hogging && vehicleFactor * groups.longerKN * lowestOf(line) + udlKNm * negative < pairLeast) {
     for (const group of groups.longer) {
-      runGroup(track, group, line, quest.jumpAt, run);
+      runGroup(track, group, line, quest.section, run);
       min = Math.min(min, run.min);
     }
   }
-  max = load.vehicleFactor * max + load.udlKNm * positive;
-  min = load.vehicleFactor * min + load.udlKNm * negative;
-  const { two } = groups;
-  if (two && (quest.hogging || quest.innerReaction)) {
-    for (const group of two.groups) {
-      if (quest.hogging) {
-        const pair = load.vehicleFactor * runTwoGroups(track, group, line, two.apartM, -1);
-        min = Math.min(min, two.share * (pair + load.udlKNm * negative));
-      } else {
-        const pair = load.vehicleFactor * runTwoGroups(track, group, line, two.apartM, 1);
-        max = Math.max(max, two.share * (pair + load.udlKNm * positive));
-      }
-    }
-  }
+  max = vehicleFactor * max + udlKNm * positive;
+  min = vehicleFactor * min + udlKNm * negative;
+  if (quest.hogging) min = Math.min(min, pairLeast);
+  if (quest.innerReaction) max = Math.max(max, pairShare * (vehicleFactor * pairMax + udlKNm * positive));
   const reach = standard.longestLoadedM;
   let beyond = false;
   if (reach !== null) {
@@ -83,6 +85,13 @@ export function trafficOnLine(
   out.max = max + load.footwayKNm * footwayShare(standard, positiveM) * positive;
   out.min = min + load.footwayKNm * footwayShare(standard, negativeM) * negative;
   return beyond;
+}
+
+/** Lowest ordinate at the stations: no vehicle does worse than its whole weight there. */
+function lowestOf(line: Float64Array): number {
+  let low = 0;
+  for (let i = 0; i < line.length; i += 2) if (line[i]! < low) low = line[i]!;
+  return low;
 }
 
 /** Footway load at a loaded length against its highest value with vehicles. */

@@ -22,8 +22,31 @@ export interface BeamMesh {
   readonly hingeAt: readonly number[];
 }
 
-/** @throws RangeError for an empty span list, spans that are not positive, or a hinge or spring off the beam. */
+const meshes = new Map<string, BeamMesh>();
+
+/**
+ * Stations of a beam. Equal geometry gives the same mesh, so that placings of vehicles made for one stiffness serve the
+ * next; the last 64 are kept.
+ * @throws RangeError for an empty span list, spans that are not positive, or a hinge or spring off the beam
+ */
 export function beamMesh(geometry: BeamGeometry): BeamMesh {
+  const { spansM, hingesM = [], springs = [], stationsPerSpan = 20 } = geometry;
+  const key = [
+    spansM.join(),
+    stationsPerSpan,
+    hingesM.join(),
+    springs.map((spring) => spring.xM).join(),
+  ].join(';');
+  const known = meshes.get(key);
+  if (known) return known;
+  const mesh = makeMesh(geometry);
+  if (meshes.size >= 64) for (const [oldest] of [...meshes].slice(0, 32)) meshes.delete(oldest);
+  meshes.set(key, mesh);
+  return mesh;
+}
+
+/** @throws RangeError for an empty span list, spans that are not positive, or a hinge or spring off the beam. */
+function makeMesh(geometry: BeamGeometry): BeamMesh {
   const { spansM, hingesM = [], springs = [] } = geometry;
   const parts = geometry.stationsPerSpan ?? 20;
   if (spansM.length === 0) throw new RangeError('spansM: expected at least one span, received none');

@@ -7,37 +7,51 @@ export interface Extremes {
 }
 
 /**
- * Runs a group over an influence line. Candidates are all placings with an axle on a station (kinks of the line are
- * stations, so these hold every peaked maximum exactly) and, where the best lies on a smooth stretch, the vertex of
- * the parabola through it and its neighbours.
+ * Runs a group over an influence line. Candidates are the swept placings, the vertex of the parabola through the best of
+ * them and its neighbours, and every heavy axle on the section itself, where the line has its peak or jump.
  * @param line element line on the stations of the track
- * @param jumpAt station where the line jumps (its own section, for a shear), or -1
+ * @param section station of the section the line belongs to, or -1 for a line without peak or jump (reaction, deflection)
+ * @returns the placings, which hold the sums of this line until the next run
  */
 export function runGroup(
   track: Track,
   group: AxleGroup,
   line: Float64Array,
-  jumpAt: number,
+  section: number,
   out: Extremes,
-): void {
+): Placings {
   const placings = placingsOf(track, group);
-  sumPlacings(placings, group, line);
-  const { adverse, relieving } = placings;
-  const top = highest(adverse);
-  const bottom = lowest(relieving);
-  out.max = Math.max(0, adverse[top]!, vertexValue(track, group, placings, line, adverse, top, 1));
-  out.min = Math.min(0, relieving[bottom]!, vertexValue(track, group, placings, line, relieving, bottom, -1));
-  if (jumpAt > 0) leftOfJump(placings, group, line, jumpAt, track.xM.length, out);
+  const { positive, negative, swept } = placings;
+  const axles = group.atM.length;
+  sumPlacings(placings, line, axles, group.whole, 0, swept);
+  let top = 0;
+  let bottom = 0;
+  for (let k = 1; k < swept; k++) {
+    if (positive[k]! > positive[top]!) top = k;
+    if (negative[k]! < negative[bottom]!) bottom = k;
+  }
+  out.max = Math.max(0, positive[top]!);
+  out.min = Math.min(0, negative[bottom]!);
+  if (out.max > 0) out.max = Math.max(out.max, vertexValue(track, group, placings, line, top, 1));
+  if (out.min < 0) out.min = Math.min(out.min, vertexValue(track, group, placings, line, bottom, -1));
+  if (section >= 0) onSection(placings, group, line, section, track.xM.length, out);
+  return placings;
 }
 
-/** Fills `adverse` (positive) and `relieving` (negative) sums of every placing; a whole group has one sum in both. */
-export function sumPlacings(placings: Placings, group: AxleGroup, line: Float64Array): void {
-  const { count, entry, weight, adverse, relieving } = placings;
-  const axles = group.atM.length;
-  let at = 0;
-  for (let k = 0; k < count; k++) {
-    let positive = 0;
-    let negative = 0;
+/** Sums of the axles that add and of those that take away in placings `from` to `to`; of a whole group all axles in both. */
+function sumPlacings(
+  placings: Placings,
+  line: Float64Array,
+  axles: number,
+  whole: boolean,
+  from: number,
+  to: number,
+): void {
+  const { entry, weight, positive, negative } = placings;
+  let at = from * axles;
+  for (let k = from; k < to; k++) {
+    let adds = 0;
+    let takes = 0;
     for (let i = 0; i < axles; i++, at++) {
       const e = entry[at]!;
       const w = 4 * at;
@@ -46,14 +60,11 @@ export function sumPlacings(placings: Placings, group: AxleGroup, line: Float64A
         weight[w + 1]! * line[e + 1]! +
         weight[w + 2]! * line[e + 2]! +
         weight[w + 3]! * line[e + 3]!;
-      if (value > 0) positive += value;
-      else negative += value;
+      if (whole || value > 0) adds += value;
+      else takes += value;
     }
-    if (group.whole) adverse[k] = relieving[k] = positive + negative;
-    else {
-      adverse[k] = positive;
-      relieving[k] = negative;
-    }
+    positive[k] = adds;
+    negative[k] = whole ? adds : takes;
   }
 }
 
@@ -61,13 +72,14 @@ export function sumPlacings(placings: Placings, group: AxleGroup, line: Float64A
  * Position of the vertex of the parabola through placing k and its neighbours, m; the placing itself when they do not
  * bend the right way. `sign` is 1 for a maximum and -1 for a minimum.
  */
-export function vertexM(placings: Placings, S: Float64Array, k: number, sign: 1 | -1): number {
-  const { positionM: P, count } = placings;
+export function vertexM(placings: Placings, k: number, sign: 1 | -1): number {
+  const { positionM: P, swept } = placings;
+  const S = sign > 0 ? placings.positive : placings.negative;
   let before = k - 1;
   while (before >= 0 && P[k]! - P[before]! < 1e-6) before--;
   let after = k + 1;
-  while (after < count && P[after]! - P[k]! < 1e-6) after++;
-  if (before < 0 || after >= count) return P[k]!;
+  while (after < swept && P[after]! - P[k]! < 1e-6) after++;
+  if (before < 0 || after >= swept) return P[k]!;
   const a = P[before]! - P[k]!;
   const b = P[after]! - P[k]!;
   const fa = S[before]! - S[k]!;
@@ -106,48 +118,33 @@ function vertexValue(
   group: AxleGroup,
   placings: Placings,
   line: Float64Array,
-  S: Float64Array,
   k: number,
   sign: 1 | -1,
 ): number {
-  const at = vertexM(placings, S, k, sign);
+  const at = vertexM(placings, k, sign);
   return at === placings.positionM[k] ? 0 : effectAt(track, group, line, at, sign);
 }
 
-/** A line that jumps is read just right of its station by the placings; here each axle in turn stands just left of it. */
-function leftOfJump(
+/** Each heavy axle on the section: just right of it, as the placings read a jump, and just left of it. */
+function onSection(
   placings: Placings,
   group: AxleGroup,
   line: Float64Array,
-  station: number,
+  section: number,
   stations: number,
   out: Extremes,
 ): void {
-  const axles = group.atM.length;
-  const left = line[4 * station - 2]!;
-  const right = 4 * station < line.length ? line[4 * station]! : left;
-  for (let i = 0; i < axles; i++) {
-    const k = placings.onStation[i * stations + station]!;
-    const load = group.loadKN[i]!;
-    if (group.whole) {
-      const value = placings.adverse[k]! + load * (left - right);
-      out.max = Math.max(out.max, value);
-      out.min = Math.min(out.min, value);
-    } else {
-      out.max = Math.max(out.max, placings.adverse[k]! + load * (Math.max(left, 0) - Math.max(right, 0)));
-      out.min = Math.min(out.min, placings.relieving[k]! + load * (Math.min(left, 0) - Math.min(right, 0)));
-    }
+  const { heavy, positive, negative, onStation, swept } = placings;
+  const before = section > 0 ? line[4 * section - 2]! : line[0]!;
+  const after = 4 * section < line.length ? line[4 * section]! : before;
+  for (let h = 0; h < heavy.length; h++) {
+    const k = onStation[h * stations + section]!;
+    if (k >= swept) sumPlacings(placings, line, group.atM.length, group.whole, k, k + 1);
+    const load = group.loadKN[heavy[h]!]!;
+    const whole = group.whole;
+    const toLeftMax = load * (whole ? before - after : Math.max(before, 0) - Math.max(after, 0));
+    const toLeftMin = load * (whole ? before - after : Math.min(before, 0) - Math.min(after, 0));
+    out.max = Math.max(out.max, positive[k]! + Math.max(0, toLeftMax));
+    out.min = Math.min(out.min, negative[k]! + Math.min(0, toLeftMin));
   }
-}
-
-function highest(S: Float64Array): number {
-  let best = 0;
-  for (let k = 1; k < S.length; k++) if (S[k]! > S[best]!) best = k;
-  return best;
-}
-
-function lowest(S: Float64Array): number {
-  let best = 0;
-  for (let k = 1; k < S.length; k++) if (S[k]! < S[best]!) best = k;
-  return best;
 }

@@ -1,14 +1,18 @@
 import type { LineBeam } from '../beam/lineBeam.ts';
 import { loadTrack, type Track } from './track.ts';
 
-const tracks = new WeakMap<LineBeam, Track>();
+const tracks = new WeakMap<Float64Array, Track>();
 
-/** The track along a beam; kept with the beam, so that several traffic loads share its placings. */
+/** The track along a beam; kept with its stations, so that beams of equal geometry share placings. */
 export function beamTrack(beam: LineBeam): Track {
-  let track = tracks.get(beam);
+  let track = tracks.get(beam.xM);
   if (!track) {
-    track = loadTrack(beam.xM);
-    tracks.set(beam, track);
+    const { left, right } = beam.freedoms;
+    track = loadTrack(
+      beam.xM,
+      left.some((freedom, i) => freedom !== right[i]),
+    );
+    tracks.set(beam.xM, track);
   }
   return track;
 }

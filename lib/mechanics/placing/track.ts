@@ -12,35 +12,41 @@ export interface AxleGroup {
 /** Stations that loads travel along, with the placings of every axle group met so far. */
 export interface Track {
   readonly xM: ArrayLike<number>;
+  /** True when lines may have kinks at any station (trusses, hinged beams), false when only at their own section. */
+  readonly kinked: boolean;
   readonly placings: Map<AxleGroup, Placings>;
 }
 
 /**
- * Every position of a group in which one of its axles stands on a station, in rising order, with the cubic weights
- * that read an influence line under each axle. Shared by all lines of a track; `scratch` arrays belong to it.
+ * Positions of a group in which one of its heavy axles stands on a station, with the cubic weights that read an influence
+ * line under each axle. The first `swept` of them are in rising order and are tried for every line: all of them on a
+ * kinked track, those of one heavy axle on a smooth one. The rest serve lines with a peak at a known station.
  */
 export interface Placings {
-  readonly count: number;
+  readonly swept: number;
+  /** Axles that were set on stations: at least half as heavy as the heaviest, for no peak stands under a light one. */
+  readonly heavy: readonly number[];
   /** Position of the first axle, m. */
   readonly positionM: Float64Array;
   /** For placing k and axle i, at k * axles + i: the first entry of its element in an element line. */
   readonly entry: Int32Array;
   /** Four weights for each of the same, at 4 * (k * axles + i); nil off the track; axle load included. */
   readonly weight: Float64Array;
-  /** Placing in which axle i stands on station s, at i * stations + s. */
+  /** Placing in which heavy axle number h stands on station s, at h * stations + s. */
   readonly onStation: Int32Array;
-  readonly adverse: Float64Array;
-  readonly relieving: Float64Array;
+  /** Sums of the line last summed: positive parts, negative parts (both the whole for a whole group). */
+  readonly positive: Float64Array;
+  readonly negative: Float64Array;
 }
 
 /** @throws RangeError when stations do not rise. */
-export function loadTrack(xM: ArrayLike<number>): Track {
+export function loadTrack(xM: ArrayLike<number>, kinked = true): Track {
   for (let i = 1; i < xM.length; i++) {
     if (!(xM[i]! > xM[i - 1]!))
       throw new RangeError(`xM[${i}]: expected more than ${xM[i - 1]}, received ${xM[i]}`);
   }
   if (!(xM.length >= 2)) throw new RangeError(`xM: expected two stations or more, received ${xM.length}`);
-  return { xM, placings: new Map() };
+  return { xM, kinked, placings: new Map() };
 }
 
 /** The group running the other way. */
@@ -57,21 +63,24 @@ export function reversed(group: AxleGroup): AxleGroup {
 export function placingsOf(track: Track, group: AxleGroup): Placings {
   const known = track.placings.get(group);
   if (known) return known;
-  const made = makePlacings(track.xM, group);
+  const made = makePlacings(track, group);
   track.placings.set(group, made);
   return made;
 }
 
-function makePlacings(xM: ArrayLike<number>, group: AxleGroup): Placings {
+function makePlacings({ xM, kinked }: Track, group: AxleGroup): Placings {
   const stations = xM.length;
   const axles = group.atM.length;
-  const count = stations * axles;
-  const order = Array.from({ length: count }, (_, key) => key);
+  const heaviest = Math.max(...group.loadKN);
+  const heavy = group.loadKN.flatMap((load, i) => (load >= heaviest / 2 ? [i] : []));
+  const count = stations * heavy.length;
   const first = Float64Array.from(
-    order,
-    (key) => xM[key % stations]! - group.atM[Math.floor(key / stations)]!,
+    { length: count },
+    (_, key) => xM[key % stations]! - group.atM[heavy[Math.floor(key / stations)]!]!,
   );
-  order.sort((a, b) => first[a]! - first[b]!);
+  const swept = kinked ? count : stations;
+  const order = Uint32Array.from({ length: count }, (_, key) => key);
+  order.subarray(0, swept).sort((a, b) => first[a]! - first[b]!);
 
   const positionM = new Float64Array(count);
   const entry = new Int32Array(count * axles);
@@ -81,7 +90,7 @@ function makePlacings(xM: ArrayLike<number>, group: AxleGroup): Placings {
     positionM[k] = first[key]!;
     onStation[key] = k;
     const station = key % stations;
-    const reference = Math.floor(key / stations);
+    const reference = heavy[Math.floor(key / stations)]!;
     for (let i = 0; i < axles; i++) {
       // The axle on the station stands exactly there, just to its right, whatever rounding says.
       const x = i === reference ? xM[station]! : first[key]! + group.atM[i]!;
@@ -89,13 +98,14 @@ function makePlacings(xM: ArrayLike<number>, group: AxleGroup): Placings {
     }
   });
   return {
-    count,
+    swept,
+    heavy,
     positionM,
     entry,
     weight,
     onStation,
-    adverse: new Float64Array(count),
-    relieving: new Float64Array(count),
+    positive: new Float64Array(count),
+    negative: new Float64Array(count),
   };
 }
 

@@ -1,22 +1,22 @@
-import { effectAt, sumPlacings, vertexM } from './axles.ts';
-import { placingsOf, type AxleGroup, type Track } from './track.ts';
+import { effectAt, vertexM } from './axles.ts';
+import type { AxleGroup, Placings, Track } from './track.ts';
 
 /**
  * Greatest effect of one sign of two equal groups in one lane, the first axle of the second at least `apartM` behind
  * the first axle of the first (length of the group + clear distance).
+ * @param placings of this group as `runGroup` left them for this line
  * @param sign 1 for the greatest, -1 for the least
  * @returns the effect with its sign; 0 when two groups do nothing adverse
  */
 export function runTwoGroups(
   track: Track,
   group: AxleGroup,
+  placings: Placings,
   line: Float64Array,
   apartM: number,
   sign: 1 | -1,
 ): number {
-  const placings = placingsOf(track, group);
-  sumPlacings(placings, group, line);
-  const S = sign > 0 ? placings.adverse : placings.relieving;
+  const S = sign > 0 ? placings.positive : placings.negative;
   const P = placings.positionM;
   let ahead = -1;
   let behind = 0;
@@ -24,8 +24,8 @@ export function runTwoGroups(
   let bestBehind = 0;
   let best = 0;
   let next = 0;
-  for (let k = 0; k < placings.count; k++) {
-    for (; next < placings.count && P[next]! <= P[k]! - apartM + 1e-9; next++) {
+  for (let k = 0; k < placings.swept; k++) {
+    for (; next < placings.swept && P[next]! <= P[k]! - apartM + 1e-9; next++) {
       if (ahead < 0 || sign * S[next]! > sign * S[ahead]!) ahead = next;
     }
     if (ahead < 0) continue;
@@ -39,8 +39,8 @@ export function runTwoGroups(
   }
   if (bestAhead < 0) return 0;
   // Between placings: each at the vertex of its own parabola, moved apart when they come too close.
-  const front = vertexM(placings, S, bestAhead, sign);
-  const back = vertexM(placings, S, bestBehind, sign);
+  const front = vertexM(placings, bestAhead, sign);
+  const back = vertexM(placings, bestBehind, sign);
   const pair = (a: number, b: number): number =>
     sign * (effectAt(track, group, line, a, sign) + effectAt(track, group, line, b, sign));
   best = Math.max(
