@@ -1,13 +1,8 @@
 import type { RoadProfile, Site, SoffitLimit } from '../model/index.ts';
 import { addedFill } from './addedFill.ts';
+import { depthAt, type DepthAlong } from './depthAlong.ts';
 import { groundAt } from './lookups.ts';
 import { lowestLine, type Demand, type Rises } from './lowestLine.ts';
-
-/** Construction depth along the crossing (structure, surfacing, crossfall): chainages rise; straight in between. */
-export interface DepthAlong {
-  readonly xM: readonly number[];
-  readonly depthM: readonly number[];
-}
 
 /** Why no road line fits, and the smallest ways out. */
 export interface ProfileRefusal {
@@ -31,19 +26,6 @@ interface Clear {
   readonly chainageM: number;
   /** Road level needed there, m. */
   readonly levelM: number;
-}
-
-function depthAt(depth: number | DepthAlong, chainageM: number): number {
-  if (typeof depth === 'number') return depth;
-  const { xM, depthM } = depth;
-  let i = 1;
-  while (i < xM.length - 1 && xM[i]! < chainageM) i += 1;
-  const x0 = xM[i - 1]!;
-  const x1 = xM[i] ?? x0;
-  const d0 = depthM[i - 1]!;
-  const d1 = depthM[i] ?? d0;
-  const share = x1 > x0 ? Math.min(Math.max((chainageM - x0) / (x1 - x0), 0), 1) : 0;
-  return d0 + share * (d1 - d0);
 }
 
 /** Road levels needed: at both ends of every limit and wherever the depth bends under it. */
