@@ -97,3 +97,6 @@ export {
   halfSpanMomentKNm,
   type ArchKind,
 } from './members/arches.ts';
+export { cantileverStages, type CantileverMoments, type CantileverStage } from './stages/cantileverStages.ts';
+export { launchStages, type Launch, type LaunchMoments } from './stages/launchStages.ts';
+export { creepRedistributed, spanBySpan, type SpanBySpan, type StagedMoments } from './stages/spanBySpan.ts';

@@ -8,8 +8,12 @@ export interface BeamGeometry {
   readonly stationsPerSpan?: number;
   /** Where the beam is cut by a moment hinge, m. */
   readonly hingesM?: readonly number[];
+  /** Stations wanted besides: changes of section or load, joints. */
+  readonly extraStationsM?: readonly number[];
   /** Elastic supports besides the rigid ones. */
   readonly springs?: readonly { readonly xM: number; readonly kNPerM: number }[];
+  /** Lengths that stick out beyond the first and last support, m; stations before the first support have x < 0. */
+  readonly overhangsM?: { readonly start?: number; readonly end?: number };
   /** Ends built in against rotation. */
   readonly fixedEnds?: { readonly start?: boolean; readonly end?: boolean };
 }
@@ -20,6 +24,14 @@ export interface BeamMesh {
   readonly supportAt: readonly number[];
   readonly springAt: readonly number[];
   readonly hingeAt: readonly number[];
+}
+
+function overhangs({ overhangsM = {} }: BeamGeometry): [start: number, end: number] {
+  const both: [number, number] = [overhangsM.start ?? 0, overhangsM.end ?? 0];
+  for (const length of both) {
+    if (!(length >= 0)) throw new RangeError(`overhangsM: expected 0 m or more, received ${length}`);
+  }
+  return both;
 }
 
 const meshes = new Map<string, BeamMesh>();
@@ -36,6 +48,8 @@ export function beamMesh(geometry: BeamGeometry): BeamMesh {
     stationsPerSpan,
     hingesM.join(),
     springs.map((spring) => spring.xM).join(),
+    overhangs(geometry).join(),
+    geometry.extraStationsM?.join(),
   ].join(';');
   const known = meshes.get(key);
   if (known) return known;
@@ -55,7 +69,9 @@ function makeMesh(geometry: BeamGeometry): BeamMesh {
   });
   if (!(parts >= 2)) throw new RangeError(`stationsPerSpan: expected 2 or more, received ${parts}`);
 
-  const x = [0];
+  const [before, after] = overhangs(geometry);
+  const x = before > 0 ? Array.from({ length: parts }, (_, i) => (before * i) / parts - before) : [];
+  x.push(0);
   let start = 0;
   const supportsM = [0];
   for (const span of spansM) {
@@ -64,11 +80,14 @@ function makeMesh(geometry: BeamGeometry): BeamMesh {
     x[x.length - 1] = start;
     supportsM.push(start);
   }
-  const extra = [...hingesM, ...springs.map((spring) => spring.xM)];
+  for (let i = 1; i <= parts && after > 0; i++) x.push(start + (after * i) / parts);
+  const extra = [...hingesM, ...springs.map((spring) => spring.xM), ...(geometry.extraStationsM ?? [])];
   const sameM = start * 1e-9;
   for (const at of extra) {
-    if (!(at >= 0 && at <= start))
-      throw new RangeError(`hinge or spring: expected 0 to ${start} m, received ${at}`);
+    if (!(at >= -before && at <= start + after))
+      throw new RangeError(
+        `hinge, spring or station: expected ${-before} to ${start + after} m, received ${at}`,
+      );
     if (!x.some((known) => Math.abs(known - at) <= sameM)) x.push(at);
   }
   if (extra.length > 0) x.sort((a, b) => a - b);

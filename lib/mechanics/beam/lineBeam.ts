@@ -8,7 +8,7 @@ import { beamMesh, type BeamGeometry } from './beamMesh.ts';
 export interface LineBeam {
   readonly spansM: readonly number[];
   readonly lengthM: number;
-  /** Stations, m from the first support. */
+  /** Stations, m from the first support (negative on an overhang before it). */
   readonly xM: Float64Array;
   /** Station of each rigid support. */
   readonly supportAt: readonly number[];
@@ -69,7 +69,7 @@ export function lineBeam(geometry: BeamGeometry): LineBeam {
 
   const beam = {
     spansM: [...geometry.spansM],
-    lengthM: xM[n - 1]!,
+    lengthM: xM[n - 1]! - xM[0]!,
     xM,
     supportAt: mesh.supportAt,
     springAt: mesh.springAt,

@@ -1,16 +1,25 @@
 import { effectsOf, type Effects } from './effects.ts';
 import type { LineBeam } from './lineBeam.ts';
 
-/** Uniform load, kN/m downward, on the whole beam or one value for each span. */
+/** Uniform load, kN/m downward, on the whole beam or one value for each span; an overhang carries that of the span beside it. */
 export function uniform(beam: LineBeam, wKNm: number | readonly number[]): Effects {
-  const { xM } = beam;
-  const held = new Float64Array(4 * (xM.length - 1));
+  const W = new Float64Array(beam.xM.length - 1);
   let span = 0;
-  for (let e = 0; e < xM.length - 1; e++) {
-    if (e === beam.supportAt[span + 1]) span++;
-    const w = typeof wKNm === 'number' ? wKNm : (wKNm[span] ?? 0);
-    if (w !== 0) holdLinear(held, e, xM[e + 1]! - xM[e]!, w, w);
+  for (let e = 0; e < W.length; e++) {
+    if (span < beam.spansM.length - 1 && e === beam.supportAt[span + 1]) span++;
+    W[e] = typeof wKNm === 'number' ? wKNm : (wKNm[span] ?? 0);
   }
+  return stepped(beam, W);
+}
+
+/** Load that is uniform within each element, kN/m downward: one value an element, stations less one. */
+export function stepped(beam: LineBeam, wKNm: Float64Array): Effects {
+  const { xM } = beam;
+  if (wKNm.length !== xM.length - 1) {
+    throw new RangeError(`wKNm: expected ${xM.length - 1} values, one an element, received ${wKNm.length}`);
+  }
+  const held = new Float64Array(4 * (xM.length - 1));
+  for (let e = 0; e < wKNm.length; e++) holdLinear(held, e, xM[e + 1]! - xM[e]!, wKNm[e]!, wKNm[e]!);
   return effectsOf(beam, { heldEnds: held });
 }
 
@@ -60,8 +69,9 @@ export function pointLoads(beam: LineBeam, loads: readonly PointLoad[]): Effects
   const held = new Float64Array(4 * (xM.length - 1));
   const stationKN = new Float64Array(xM.length);
   for (const load of loads) {
-    if (!(load.xM >= 0 && load.xM <= beam.lengthM)) {
-      throw new RangeError(`point load: expected 0 to ${beam.lengthM} m, received ${load.xM}`);
+    const last = xM[xM.length - 1]!;
+    if (!(load.xM >= xM[0]! && load.xM <= last)) {
+      throw new RangeError(`point load: expected ${xM[0]} to ${last} m, received ${load.xM}`);
     }
     const e = elementAt(xM, load.xM);
     const h = xM[e + 1]! - xM[e]!;
