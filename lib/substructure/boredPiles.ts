@@ -3,6 +3,10 @@ import { demandAt } from './foot.ts';
 import type { GroundFigures } from './data.ts';
 import { substructureData } from './data.ts';
 
+/** Most rows of piles along and across the road. */
+const mostAlong = 6;
+const mostAcross = 10;
+
 /** A capped group of bored piles. */
 export interface PileGroup {
   readonly rowsAlong: number;
@@ -44,12 +48,24 @@ export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLe
   let best: PileGroup | null = null;
   let least = Infinity;
   const wall = task.backfill !== null;
+  // What the group has to carry before its own weight: groups below it are not worked out.
+  const stress = piles.concreteMPa * 1000;
+  let leastLateral = 0;
+  let leastVertical = 0;
+  for (const combo of task.combos) {
+    leastLateral = Math.max(
+      leastLateral,
+      Math.sqrt(combo.alongKN ** 2 + combo.acrossKN ** 2) / combo.capacity,
+    );
+    leastVertical = Math.max(leastVertical, combo.verticalKN / combo.capacity);
+  }
   for (let k = 0; k < piles.diametersM.length; k++) {
     const diameterM = piles.diametersM[k]!;
     const lateralKN = piles.lateralKN[k]!;
     const spacing = piles.spacing * diameterM;
-    for (let rowsAlong = 2; rowsAlong <= 5; rowsAlong++) {
-      for (let rowsAcross = 2; rowsAcross <= 12; rowsAcross++) {
+    const area = (Math.PI * diameterM * diameterM) / 4;
+    for (let rowsAlong = 2; rowsAlong <= mostAlong; rowsAlong++) {
+      for (let rowsAcross = 2; rowsAcross <= mostAcross; rowsAcross++) {
         const lengthM = Math.max(
           (rowsAlong - 1) * spacing + 2 * diameterM,
           task.shaftLengthM + diameterM / 2,
@@ -60,7 +76,10 @@ export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLe
         );
         const depthM = Math.max(piles.leastCapDepthM, piles.capDepthDiameters * diameterM);
         const capVolume = lengthM * widthM * depthM;
-        if (capVolume > least) break;
+        const n = rowsAlong * rowsAcross;
+        if (capVolume + n * area * ground.socketDiameters * diameterM > least) break;
+        if (wall && rowsAcross > 2 && widthM > task.shaftWidthM + 2 * diameterM) break;
+        if (n * lateralKN < leastLateral || n * stress * area < leastVertical) continue;
         const undersideM = levels.capTopM - depthM;
         const need = stratumLength(task, ground, {
           diameterM,
@@ -77,8 +96,7 @@ export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLe
         const startM = Math.min(levels.bearingLevelM, levels.scouredLevelM, undersideM);
         const toeLevelM = startM - need;
         const pileLength = undersideM - toeLevelM;
-        const volume =
-          capVolume + (rowsAlong * rowsAcross * pileLength * Math.PI * diameterM * diameterM) / 4;
+        const volume = capVolume + n * pileLength * area;
         if (volume < least) {
           least = volume;
           best = {
@@ -121,7 +139,7 @@ function stratumLength(task: FootTask, ground: GroundFigures, trial: Trial): num
   let inStratum = ground.socketDiameters * d;
   for (const combo of task.combos) {
     const load = demandAt(task, combo, trial.lengthM, trial.widthM, trial.depthM, trial.undersideM);
-    if (Math.hypot(load.alongKN, load.acrossKN) > n * trial.lateralKN * combo.capacity) return null;
+    if (Math.sqrt(load.alongKN ** 2 + load.acrossKN ** 2) > n * trial.lateralKN * combo.capacity) return null;
     const swing =
       Math.abs(load.momentAlongKNm) * perMomentAlong + Math.abs(load.momentAcrossKNm) * perMomentAcross;
     const most = (load.verticalKN / n + swing) / combo.capacity;

@@ -62,7 +62,10 @@ const schema = z.strictObject({
   footing: figures(
     'deepestM',
     'baseFriction',
-    'overhangPerDepth',
+    'shearKPa',
+    'designPressure',
+    'coverM',
+    'leastOverhangM',
     'leastDepthM',
     'stepM',
     'soilKNm3',

@@ -1,5 +1,5 @@
 import type { Design, Site, Support } from '../model/index.ts';
-import { constructionDepth } from '../site/constructionDepth.ts';
+import { constructionDepth } from '../site/index.ts';
 import { substructureData } from './data.ts';
 import { windOnDeck } from './loads.ts';
 import { standOneSupport } from './standOneSupport.ts';

@@ -1,3 +1,4 @@
 export { itemOf, items, type Item } from './items.ts';
+export { methodLines } from './methodLines.ts';
 export { measure } from './measure.ts';
 export { perM2, quantitiesOf, splitQuantities } from './quantitiesOf.ts';
