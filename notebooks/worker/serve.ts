@@ -1,0 +1,48 @@
+import type { Progress } from '../reactive/index.ts';
+import type { Answer, Jobs, Line, Wish } from './messages.ts';
+import { sliced } from './sliced.ts';
+import type { Slicing } from './sliced.ts';
+import { transferables } from './transferables.ts';
+
+/**
+ * Answers the wishes that come down the line with the jobs given, several at a time by turns. Results move rather
+ * than being copied where they can, so a job must not keep arrays that it hands out.
+ */
+export function serve(line: Line, jobs: Jobs, slicing: Pick<Slicing, 'now' | 'budgetMs' | 'breathe'>): void {
+  const live = new Map<number, AbortController>();
+  const say = (answer: Answer, transfer: Transferable[] = []): void => line.postMessage(answer, { transfer });
+
+  const work = async (id: number, job: string, arg: unknown): Promise<void> => {
+    const controller = new AbortController();
+    const { signal } = controller;
+    live.set(id, controller);
+    try {
+      const start = jobs[job];
+      if (!start) throw new Error(`job '${job}': expected one of ${Object.keys(jobs).join(', ')}`);
+      const report = (progress: Progress): void => say({ id, progress });
+      const value = await sliced(start(arg as never), { ...slicing, signal, report });
+      say({ id, value }, transferables(value));
+    } catch (error) {
+      if (!signal.aborted) sayError(id, error);
+    } finally {
+      live.delete(id);
+    }
+  };
+
+  /** An error keeps its name and message on the way by itself; its own fields travel beside it. */
+  const sayError = (id: number, thrown: unknown): void => {
+    // Not every engine clones a DOMException.
+    const error = thrown instanceof DOMException ? new Error(`${thrown.name}: ${thrown.message}`) : thrown;
+    const fields = error instanceof Error ? Object.assign({}, error) : {};
+    try {
+      say({ id, error, fields });
+    } catch {
+      say({ id, error: new Error(String(error)), fields: {} });
+    }
+  };
+
+  line.addEventListener('message', ({ data }: { data: Wish }) => {
+    if ('abort' in data) live.get(data.id)?.abort();
+    else void work(data.id, data.job, data.arg);
+  });
+}
