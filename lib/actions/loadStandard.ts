@@ -58,6 +58,12 @@ const schema = z.strictObject({
     mostKNm2: notNegative,
     mostWithVehiclesKNm2: notNegative,
   }),
+  /** True where the standard has distribution factors for girder decks (`aashtoFactors`). */
+  distributionFactors: z.boolean(),
+  /** Law of modulus and tensile strength of concrete. */
+  concreteLaw: z.enum(['en-1992', 'aashto']),
+  /** Steel of `data/materials.json` taken when nothing is said. */
+  steelGrade: z.enum(['S355', 'S460', 'GR50']),
   /** Loaded length the model was written for; null = no limit stated. */
   longestLoadedM: positive.nullable(),
   factors: z.strictObject({
@@ -105,12 +111,16 @@ export type LoadStandard = Readonly<z.infer<typeof schema>>;
 const files: Readonly<Record<StandardId, unknown>> = { lm1, hl93 };
 const parsed = new Map<StandardId, LoadStandard>();
 
-/** The standard of that id, checked once. @throws RangeError for an id without a data file. */
+/**
+ * The standard of that id, checked once. A further standard is its id in `lib/model`, its data file named here and its
+ * rows in `data/materials.json`.
+ * @throws RangeError for an id without a data file.
+ */
 export function loadStandard(id: StandardId): LoadStandard {
   const known = parsed.get(id);
   if (known) return known;
   if (!(id in files))
-    throw new RangeError(`standard: expected one of ${standardIds.join(', ')}, received ${String(id)}`);
+    throw new RangeError(`standard: expected one of ${standardIds.join(', ')}, received ${id as string}`);
   const made = schema.parse(files[id]);
   parsed.set(id, made);
   return made;

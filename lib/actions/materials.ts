@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import file from '../../data/materials.json';
-import type { StandardId } from '../model/index.ts';
+import { standardIds, type StandardId } from '../model/index.ts';
 import { loadStandard } from './loadStandard.ts';
 
 const positive = z.number().positive();
@@ -28,12 +28,12 @@ const strengths = z.strictObject({ slab: positive, girder: positive, box: positi
 const schema = z.strictObject({
   steel: z.strictObject({ S355: steel, S460: steel, GR50: steel }),
   steelDensityKgM3: positive,
-  reinforcement: z.strictObject({ lm1: bars, hl93: bars }),
-  strand: z.strictObject({ lm1: strand, hl93: strand }),
+  reinforcement: z.record(z.enum(standardIds), bars),
+  strand: z.record(z.enum(standardIds), strand),
   stay: cable,
   mainCable: cable,
   /** Cylinder strengths taken when nothing is said, MPa. */
-  concreteDefaultMPa: z.strictObject({ lm1: strengths, hl93: strengths }),
+  concreteDefaultMPa: z.record(z.enum(standardIds), strengths),
 });
 
 /** Materials as read from `data/materials.json`. */
@@ -43,7 +43,7 @@ export type SteelGrade = keyof typeof materials.steel;
 
 /** Steel used under a standard when nothing is said. */
 export function usualSteel(id: StandardId): SteelGrade {
-  return id === 'hl93' ? 'GR50' : 'S355';
+  return loadStandard(id).steelGrade;
 }
 
 /** Yield strength of a plate, MPa, by its thickness in mm (product standard). @throws RangeError beyond the thickest listed */
@@ -75,9 +75,9 @@ export interface Concrete {
  */
 export function concrete(id: StandardId, fckMPa: number): Concrete {
   if (!(fckMPa > 0)) throw new RangeError(`concrete strength: expected more than 0 MPa, received ${fckMPa}`);
-  const { resistance, unitWeights } = loadStandard(id);
+  const { resistance, unitWeights, concreteLaw } = loadStandard(id);
   const fcdMPa = (resistance.alphaConcrete * fckMPa) / resistance.concrete;
-  if (id === 'hl93') {
+  if (concreteLaw === 'aashto') {
     const ksi = 6.894757;
     const root = Math.sqrt(fckMPa / ksi);
     const kcf = unitWeights.concreteKNm3 / 157.0875;

@@ -16,6 +16,7 @@ export interface PlacedLanes {
  * adverse parts loaded, every number of loaded lanes with its presence factor; returns the worst.
  * @param leftM position of the left kerb, m from the middle of the deck
  * @param weigh vehicle value of 1 against 1 kN/m of uniform load, kN/m, by which arrangements are compared
+ * @param mostLanes at most so many lanes are loaded
  */
 export function placeLanes(
   standard: LoadStandard,
@@ -23,6 +24,7 @@ export function placeLanes(
   leftM: number,
   carriagewayM: number,
   weigh: number,
+  mostLanes = Infinity,
 ): PlacedLanes {
   const { lanes } = standard;
   const { count, widthM } = notionalLanes(lanes, carriagewayM);
@@ -32,7 +34,18 @@ export function placeLanes(
   for (let step = 0; step <= steps; step++) {
     const start = leftM + (steps === 0 ? 0 : (slack * step) / steps);
     for (const lean of [-1, 0, 1]) {
-      const placed = loadLanes(standard, line, leftM, carriagewayM, start, widthM, count, lean, weigh);
+      const placed = loadLanes(
+        standard,
+        line,
+        leftM,
+        carriagewayM,
+        start,
+        widthM,
+        count,
+        lean,
+        weigh,
+        mostLanes,
+      );
       if (placed.vehicle * weigh + placed.uniformKNm > best.vehicle * weigh + best.uniformKNm) best = placed;
     }
   }
@@ -50,6 +63,7 @@ function loadLanes(
   count: number,
   lean: number,
   weigh: number,
+  mostLanes: number,
 ): PlacedLanes {
   const { lanes } = standard;
   const loaded = Math.min(lanes.loadedWidthM, widthM);
@@ -70,7 +84,7 @@ function loadLanes(
   let vehicle = 0;
   let uniformKNm = spare * lanes.remainingKNm2 * further;
   let best: PlacedLanes = { vehicle: 0, uniformKNm: 0, loadedLanes: 0 };
-  strips.forEach((strip, i) => {
+  strips.slice(0, mostLanes).forEach((strip, i) => {
     vehicle +=
       Math.max(0, strip.vehicle) *
       shareOf(lanes.vehicleShare, i, 0) *

@@ -3,7 +3,7 @@ import type { CrossLine } from './crossLine.ts';
 import { loadStandard } from './loadStandard.ts';
 import { placeLanes } from './placeLanes.ts';
 import { leftKerbM } from './trafficOnDeck.ts';
-import { footwayOnLine } from './trafficOnGirder.ts';
+import { footwayOnLine } from './footwayOnLine.ts';
 import { vehicleAsUniformKNm, type TrafficLoad } from './trafficLoad.ts';
 
 /**
@@ -11,15 +11,17 @@ import { vehicleAsUniformKNm, type TrafficLoad } from './trafficLoad.ts';
  * a stringer by the lever rule, the bending of a cross-girder (then the load comes out in kNm for kN). Lanes are placed
  * for the worst.
  * @param weighKNm what one vehicle counts against 1 kN/m of uniform load; for short loaded lengths the default is low
+ * @param mostLanes at most so many lanes are loaded
  */
 export function trafficOnCrossLine(
   id: StandardId,
   deck: DeckSpec,
   line: CrossLine,
   weighKNm = vehicleAsUniformKNm(id),
+  mostLanes?: number,
 ): TrafficLoad {
   const standard = loadStandard(id);
-  const placed = placeLanes(standard, line, leftKerbM(deck), deck.carriagewayM, weighKNm);
+  const placed = placeLanes(standard, line, leftKerbM(deck), deck.carriagewayM, weighKNm, mostLanes);
   return {
     standard: id,
     vehicleFactor: placed.vehicle,

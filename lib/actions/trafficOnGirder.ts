@@ -1,12 +1,19 @@
 import type { DeckSpec, StandardId } from '../model/index.ts';
-import { crossPositiveArea, type CrossLine } from './crossLine.ts';
+import { aashtoFactors, outerCorrection, type GirderDeck } from './aashtoFactors.ts';
+import type { CrossLine } from './crossLine.ts';
+import { leverRule } from './leverRule.ts';
 import { loadStandard } from './loadStandard.ts';
-import { placeLanes } from './placeLanes.ts';
 import { leftKerbM } from './trafficOnDeck.ts';
-import { vehicleAsUniformKNm, type TrafficLoad } from './trafficLoad.ts';
+import type { TrafficLoad } from './trafficLoad.ts';
+import { trafficOnCrossLine } from './trafficOnCrossLine.ts';
+
+/** What the AASHTO factors need besides the girder lines; without it a rigid crossbeam is taken. */
+export type GirderOptions = Pick<GirderDeck, 'spanM' | 'slabM' | 'kgM4' | 'skewDeg'>;
 
 /**
- * Traffic on one girder of a deck: lever rule between two girders, rigid crossbeam for more.
+ * Traffic on one girder of a deck. Two girders: lever rule. More: rigid crossbeam; under AASHTO, with `options` and
+ * inside their validity, the distribution factors for an inner girder, and for an outer one the worst of its corrected
+ * factor, the lever rule with one lane and the rigid crossbeam (4.6.2.2.2d).
  * @param girderOffsetsM girder lines, m from the middle of the deck, rising
  * @param girder which of them
  * @throws RangeError for fewer than two girders or one that is not there
@@ -16,25 +23,48 @@ export function trafficOnGirder(
   deck: DeckSpec,
   girderOffsetsM: readonly number[],
   girder: number,
+  options?: GirderOptions,
 ): TrafficLoad {
-  if (!(girderOffsetsM.length >= 2)) {
-    throw new RangeError(`girderOffsetsM: expected two girders or more, received ${girderOffsetsM.length}`);
-  }
-  if (!(girder >= 0 && girder < girderOffsetsM.length)) {
-    throw new RangeError(`girder: expected 0 to ${girderOffsetsM.length - 1}, received ${girder}`);
+  const n = girderOffsetsM.length;
+  if (!(n >= 2)) throw new RangeError(`girderOffsetsM: expected two girders or more, received ${n}`);
+  if (!(girder >= 0 && girder < n)) {
+    throw new RangeError(`girder: expected 0 to ${n - 1}, received ${girder}`);
   }
   const standard = loadStandard(id);
-  const line = rigidCrossbeam(girderOffsetsM, girder);
-  const placed = placeLanes(standard, line, leftKerbM(deck), deck.carriagewayM, vehicleAsUniformKNm(id));
+  const rigid = placedOn(id, deck, rigidCrossbeam(girderOffsetsM, girder));
+  if (n === 2) return { ...rigid, distribution: 'lever rule' };
+  if (!standard.distributionFactors || !options) return rigid;
+
+  const outer = girder === 0 || girder === n - 1;
+  const spacingM = (girderOffsetsM[n - 1]! - girderOffsetsM[0]!) / (n - 1);
+  const inner = aashtoFactors({ ...options, spacingM, girders: n });
+  const edge = outer ? outerCorrection(kerbBeyond(deck, girderOffsetsM, girder)) : null;
+  if (inner.outside.length > 0 || (edge && edge.outside.length > 0)) return rigid;
+  let { moment, shear } = inner;
+  if (edge) {
+    const lever = placedOn(id, deck, leverRule(girderOffsetsM, girder), 1);
+    const least = Math.max(lever.vehicleFactor, rigid.vehicleFactor);
+    moment = Math.max(moment * edge.moment, least);
+    shear = Math.max(shear * edge.shear, least);
+  }
   return {
-    standard: id,
-    vehicleFactor: placed.vehicle,
-    udlKNm: placed.uniformKNm,
-    footwayKNm: footwayOnLine(deck, line) * standard.footway.mostWithVehiclesKNm2,
-    shearRatio: 1,
-    loadedLanes: placed.loadedLanes,
-    distribution: girderOffsetsM.length === 2 ? 'lever rule' : 'rigid crossbeam',
+    ...rigid,
+    vehicleFactor: moment,
+    udlKNm: moment * standard.lanes.uniformKNm2[0]! * standard.lanes.loadedWidthM,
+    shearRatio: shear / moment,
+    distribution: 'AASHTO factors',
   };
+}
+
+function placedOn(id: StandardId, deck: DeckSpec, line: CrossLine, mostLanes?: number): TrafficLoad {
+  return { ...trafficOnCrossLine(id, deck, line, undefined, mostLanes), distribution: 'rigid crossbeam' };
+}
+
+/** From the outer girder to the kerb beyond it, m; negative when the kerb stands inside. */
+function kerbBeyond(deck: DeckSpec, girderOffsetsM: readonly number[], girder: number): number {
+  const left = leftKerbM(deck);
+  const y = girderOffsetsM[girder]!;
+  return girder === 0 ? y - left : left + deck.carriagewayM - y;
 }
 
 /**
@@ -49,21 +79,4 @@ export function rigidCrossbeam(girderOffsetsM: readonly number[], girder: number
   const at = (y: number): number => 1 / n + (arm * (y - mean)) / second;
   const yM = [mean - 1, mean + 1];
   return { yM, value: yM.map(at) };
-}
-
-/** Adverse footway width x cross line, m. The footways lie outside the carriageway, shared by the width there is on each side. */
-export function footwayOnLine(deck: DeckSpec, line: CrossLine): number {
-  if (!(deck.footwayM > 0)) return 0;
-  const left = leftKerbM(deck);
-  const right = left + deck.carriagewayM;
-  const leftRoom = Math.max(0, left + deck.widthM / 2);
-  const rightRoom = Math.max(0, deck.widthM / 2 - right);
-  const room = leftRoom + rightRoom;
-  if (!(room > 0)) return 0;
-  const leftWidth = (deck.footwayM * leftRoom) / room;
-  const rightWidth = (deck.footwayM * rightRoom) / room;
-  return (
-    crossPositiveArea(line, -deck.widthM / 2, -deck.widthM / 2 + leftWidth) +
-    crossPositiveArea(line, deck.widthM / 2 - rightWidth, deck.widthM / 2)
-  );
 }

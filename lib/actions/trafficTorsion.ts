@@ -3,7 +3,7 @@ import type { CrossLine } from './crossLine.ts';
 import { loadStandard } from './loadStandard.ts';
 import { placeLanes } from './placeLanes.ts';
 import { leftKerbM } from './trafficOnDeck.ts';
-import { footwayOnLine } from './trafficOnGirder.ts';
+import { footwayOnLine } from './footwayOnLine.ts';
 import { vehicleAsUniformKNm } from './trafficLoad.ts';
 
 /** Torque of traffic about the middle of the deck in its worst eccentric arrangement, characteristic. */
