@@ -90,77 +90,95 @@ function rowsOf(form: FormId, method: MethodId, site: Site, size: Sizer, costOf:
   });
 }
 
-/** Position of a value on a rising grid: index of the interval and share within it, held at both ends. */
-function between(grid: readonly number[], value: number): readonly [index: number, share: number] {
+/** Place of a value among rows whose key rises: index of the interval and share within it, held at both ends. */
+function between<R>(
+  rows: readonly R[],
+  keyOf: (row: R) => number,
+  value: number,
+): readonly [index: number, share: number] {
   let i = 0;
-  while (i < grid.length - 2 && grid[i + 1]! < value) i += 1;
-  const low = grid[i]!;
-  const high = grid[i + 1] ?? low;
+  while (i < rows.length - 2 && keyOf(rows[i + 1]!) < value) i += 1;
+  const low = keyOf(rows[i]!);
+  const high = i + 1 < rows.length ? keyOf(rows[i + 1]!) : low;
   return [i, high > low ? Math.min(1, Math.max(0, (value - low) / (high - low))) : 0];
 }
+
+/** A form built by one method. */
+export interface FormAndMethod {
+  readonly form: FormId;
+  readonly method: MethodId;
+}
+
+/** Cost tables of one site and one set of rates; each form and method is sized once. */
+export interface TableShelf {
+  /** The table the search of one form uses: the form by its method and its approach form by the usual one. */
+  tableFor(asked: FormAndMethod): CostTable;
+}
+
+/** Spans beside a support are told apart to this, m: the cost of a support changes slowly with them. */
+const SPAN_CLASS_M = 5;
 
 /**
  * What the search knows of cost, made by the real sizing, take-off and mean rates: deck cost and depth of each form
  * at ten spans of its possible band, supports by what they meet at their chainage.
  *
- * @param forms each form with its method; approach forms included
  * @param costOf money of measured lines at mean rates
  */
-export function costTable(
-  forms: readonly { readonly form: FormId; readonly method: MethodId }[],
-  site: Site,
-  size: Sizer,
-  costOf: CostOf,
-): CostTable {
-  const tables = new Map<FormId, { rows: Row[]; spans: number[] }>();
-  for (const { form, method } of forms) {
-    const rows = rowsOf(form, method, site, size, costOf);
-    tables.set(form, { rows, spans: rows.map((row) => row.spanM) });
-  }
-  const tableOf = (form: FormId): { rows: Row[]; spans: number[] } => {
-    const table = tables.get(form);
-    if (!table || table.rows.length === 0)
-      throw new RangeError(`cost table: expected rows for ${form}, found none`);
-    return table;
+export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf {
+  const shelf = new Map<string, Row[]>();
+  const piers = new Map<string, number>();
+  const rowsFor = ({ form, method }: FormAndMethod): Row[] => {
+    const key = `${form} ${method}`;
+    const found = shelf.get(key) ?? rowsOf(form, method, site, size, costOf);
+    shelf.set(key, found);
+    if (found.length === 0)
+      throw new RangeError(`cost table: ${form} has no span that fits a crossing of ${site.lengthM} m`);
+    return found;
   };
-  const read = (form: FormId, spanM: number, value: (row: Row) => number): number => {
-    const { rows, spans } = tableOf(form);
-    const [i, share] = between(spans, spanM);
-    const low = value(rows[i]!);
-    return low + share * (value(rows[i + 1] ?? rows[i]!) - low);
-  };
-
   const roadLevel = (chainageM: number): number => {
     const { road, startM, lengthM } = site;
     return road.startLevelM + ((road.endLevelM - road.startLevelM) * (chainageM - startM)) / lengthM;
   };
-  const piers = new Map<string, number>();
-  /** Spans beside a support are told apart to this, m: the support cost changes slowly with them. */
-  const SPAN_CLASS_M = 5;
 
-  return {
-    deckPerM(form, spanM, governingM) {
-      const share = governingM > 0 ? spanM / governingM : 1;
-      const [i, within] = between(SHARES, share);
-      const at = (k: number): number => read(form, governingM, (row) => row.perM[k]!);
-      return at(i) + within * (at(i + 1) - at(i));
-    },
-    depthM: (form, governingM) => read(form, governingM, (row) => row.depthM),
-    unitFixed: (form, governingM, pylons = 0) =>
-      read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),
-    support(form, chainageM, spanLeftM, spanRightM) {
-      const mean = (spanLeftM + spanRightM) / 2;
-      const on = Math.max(1, Math.round(mean / SPAN_CLASS_M)) * SPAN_CLASS_M;
-      const key = `${form} ${chainageM} ${on}`;
-      const found = piers.get(key);
-      if (found !== undefined) return found;
-      const { rows, spans } = tableOf(form);
-      const [i, share] = between(spans, on);
-      const row = rows[share > 0.5 ? i + 1 : i] ?? rows[i]!;
-      const pier = standPierBetween(site, deckOnSupport(row.design), chainageM, on, on, roadLevel(chainageM));
-      const cost = costOf(expectedLines(pier));
-      piers.set(key, cost);
-      return cost;
-    },
+  const tableFor = (asked: FormAndMethod): CostTable => {
+    const rowsBy = (form: FormId): Row[] =>
+      rowsFor(form === asked.form ? asked : { form, method: formModule(form).methods[0] });
+    const read = (form: FormId, spanM: number, value: (row: Row) => number): number => {
+      const rows = rowsBy(form);
+      const [i, share] = between(rows, (row) => row.spanM, spanM);
+      const low = value(rows[i]!);
+      return low + share * (value(rows[i + 1] ?? rows[i]!) - low);
+    };
+    return {
+      deckPerM(form, spanM, governingM) {
+        const [i, within] = between(SHARES, (share) => share, governingM > 0 ? spanM / governingM : 1);
+        const at = (k: number): number => read(form, governingM, (row) => row.perM[k]!);
+        return at(i) + within * (at(i + 1) - at(i));
+      },
+      depthM: (form, governingM) => read(form, governingM, (row) => row.depthM),
+      unitFixed: (form, governingM, pylons = 0) =>
+        read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),
+      support(form, chainageM, spanLeftM, spanRightM) {
+        const on = Math.max(1, Math.round((spanLeftM + spanRightM) / 2 / SPAN_CLASS_M)) * SPAN_CLASS_M;
+        const key = `${form} ${form === asked.form ? asked.method : ''} ${chainageM} ${on}`;
+        const found = piers.get(key);
+        if (found !== undefined) return found;
+        const rows = rowsBy(form);
+        const [i, share] = between(rows, (row) => row.spanM, on);
+        const row = rows[share > 0.5 ? i + 1 : i] ?? rows[i]!;
+        const pier = standPierBetween(
+          site,
+          deckOnSupport(row.design),
+          chainageM,
+          on,
+          on,
+          roadLevel(chainageM),
+        );
+        const cost = costOf(expectedLines(pier));
+        piers.set(key, cost);
+        return cost;
+      },
+    };
   };
+  return { tableFor };
 }

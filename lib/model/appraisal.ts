@@ -2,7 +2,7 @@ import type { BillPart, Family, FormId, MethodId } from './ids.ts';
 import type { Design, DepthPair, MeasuredLine, Quantities } from './design.ts';
 import type { Dropped, Ruling } from './ruling.ts';
 import type { RoadProfile, Site } from './site.ts';
-import type { Unit } from './study.ts';
+import type { RegisterEntry, Unit } from './study.ts';
 import type { DroppedCount } from './option.ts';
 
 /** Low, likely and high: 10, 50 and 90 % of the draws. */
@@ -64,8 +64,18 @@ export interface Foundation {
   readonly ground: string;
   readonly odds: number;
   readonly kind: 'spread' | 'bored-piles';
-  readonly footing: { readonly lengthM: number; readonly widthM: number; readonly depthM: number; readonly topLevelM: number };
-  readonly piles: { readonly count: number; readonly diameterM: number; readonly lengthM: number; readonly toeLevelM: number } | null;
+  readonly footing: {
+    readonly lengthM: number;
+    readonly widthM: number;
+    readonly depthM: number;
+    readonly topLevelM: number;
+  };
+  readonly piles: {
+    readonly count: number;
+    readonly diameterM: number;
+    readonly lengthM: number;
+    readonly toeLevelM: number;
+  } | null;
   readonly lines: readonly MeasuredLine[];
 }
 
@@ -90,8 +100,14 @@ export interface WorkedOption {
 export interface AppraisedOption extends WorkedOption {
   readonly status: Status;
   readonly rulings: readonly Ruling[];
+  /** Superstructure. */
   readonly quantities: Quantities;
+  /** Superstructure, per m2 of deck. */
   readonly perM2: Quantities;
+  /** Pylons, piers, abutments and foundations, these weighed by the odds of the ground. */
+  readonly supportQuantities: Quantities;
+  /** Least spare headroom, m, and what it is measured to; null where nothing has to be kept clear. */
+  readonly headroom: { readonly spareM: number; readonly reason: string; readonly chainageM: number } | null;
   readonly deckAreaM2: number;
   readonly cost: Spread;
   readonly quartiles: readonly [q1: number, q3: number];
@@ -120,5 +136,8 @@ export interface Appraisal {
   readonly currency: string;
   readonly dropped: readonly Dropped[];
   readonly droppedCounts: readonly DroppedCount[];
+  /** Numbers given so far, for the study to keep, and those that nothing proposes any more. */
+  readonly register: readonly RegisterEntry[];
+  readonly retired: readonly number[];
   readonly standing: Standing;
 }

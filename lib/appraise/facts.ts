@@ -1,0 +1,119 @@
+import type { AppraisedOption, Facts, Option, Site, Study, Unit, WorkedOption } from '../model/index.ts';
+import { roadLevelAt, constructionDepth, groundAt, waterDepthAt } from '../site/index.ts';
+import { quantitiesOf } from '../takeoff/index.ts';
+import { PIER_HALF_WIDTH_M } from './requestFor.ts';
+import { mainUnit, spansOf } from './workOption.ts';
+
+type Known = Record<string, Facts[string]>;
+
+/** What is known of a form before anything is arranged: the span it must reach, the deck, the line of the road. */
+export function formFacts(site: Site): Facts {
+  return {
+    // Both piers stand clear of the barred stretch.
+    mainSpanM: site.mainOpening ? site.mainOpening.widthM + 2 * PIER_HALF_WIDTH_M : 'unknown',
+    deckWidthM: site.deck.widthM,
+    planRadiusM: site.planRadiusM ?? 'unknown',
+    skewDeg: site.skewDeg ?? 'unknown',
+  };
+}
+
+/** The smaller end span over the span beside it; with two spans the shorter over the longer. */
+function endSpanRatio(spans: readonly number[]): number {
+  if (spans.length === 2) return Math.min(...spans) / Math.max(...spans);
+  return Math.min(spans[0]! / spans[1]!, spans.at(-1)! / spans.at(-2)!);
+}
+
+/** Side spans of a hung unit over its main span: from each outer pylon to the end of the unit. */
+function sideSpanRatio(unit: Unit, pylons: readonly number[]): number {
+  const x = unit.supportsM;
+  const main = Math.max(...spansOf(unit));
+  const before = x[pylons[0]!]! - x[0]!;
+  const after = x.at(-1)! - x[pylons.at(-1)!]!;
+  if (pylons.length > 1) return Math.min(before, after) / main;
+  return Math.min(before, after) / Math.max(before, after);
+}
+
+function falseworkFacts(site: Site, option: WorkedOption, main: Unit): Known {
+  const from = main.supportsM[0]!;
+  const to = main.supportsM.at(-1)!;
+  const crosses = (stretch: { fromM: number; toM: number }): boolean =>
+    stretch.fromM < to && stretch.toM > from;
+  const soffit = (x: number): number =>
+    roadLevelAt(site, option.profile, x) - constructionDepth(site.deck, option.depthM.midspan);
+  const points = [...site.groundX.filter((x) => x > from && x < to), from, to];
+  return {
+    falseworkOverRailway: site.zones.some((zone) => zone.kind === 'railway' && crosses(zone)),
+    falseworkOverWater: site.waters.some(crosses),
+    falseworkHeightM: Math.max(...points.map((x) => soffit(x) - groundAt(site, x))),
+  };
+}
+
+/** What is known of where the supports stand. */
+export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'method'>): Facts {
+  const main = mainUnit(option.units);
+  const spans = spansOf(main);
+  const all = [...new Set(option.units.flatMap((unit) => unit.supportsM))];
+  const barred = (x: number): boolean =>
+    site.zones.some((zone) => zone.hard && x > zone.fromM && x < zone.toM);
+  const inner = all.slice(1, -1);
+  return {
+    ...formFacts(site),
+    mainSpanM: Math.max(...spans),
+    continuity: spans.length > 1 ? 'continuous' : 'simple',
+    method: option.method,
+    unitLengthM: main.supportsM.at(-1)! - main.supportsM[0]!,
+    supportsInRiver: inner.filter((x) => waterDepthAt(site, x) > 0).length,
+    supportsBarred: all.filter(barred).length,
+    // A study has one radius for the whole crossing.
+    radiusConstant: site.planRadiusM === null ? 'unknown' : true,
+    ...(main.pylons ? { pylons: main.pylons.length, sideSpanRatio: sideSpanRatio(main, main.pylons) } : {}),
+    ...(spans.length > 1 && !main.pylons ? { endSpanRatio: endSpanRatio(spans) } : {}),
+  };
+}
+
+/** Characteristic uplift at the ends of any unit, kN; 0 where all stay pressed. */
+function upliftKN(option: WorkedOption): number {
+  const ends = option.designs.flatMap(({ reactions }) => [reactions[0]!, reactions.at(-1)!]);
+  return Math.max(0, ...ends.map((end) => -(end.permanentKN + Math.min(0, end.trafficMinKN))));
+}
+
+/** Everything known of a worked and priced option. `budgetChance` is unknown without a budget. */
+export function optionFacts(
+  study: Study,
+  site: Site,
+  option: WorkedOption,
+  headroom: AppraisedOption['headroom'],
+  budgetChance: number | 'unknown',
+): Facts {
+  const main = mainUnit(option.units);
+  const design = option.designs[option.units.indexOf(main)]!;
+  const { figures } = design;
+  const { access, obstacles } = study.brief;
+  const pieces = option.designs.flatMap(({ heaviestPiece }) => (heaviestPiece ? [heaviestPiece] : []));
+  const clearances = obstacles.flatMap(({ clearance }) => (clearance ? [clearance] : []));
+  const known: Known = {
+    ...arrangementFacts(site, option),
+    ...(option.method === 'falsework' ? falseworkFacts(site, option, main) : { falseworkHeightM: 0 }),
+    haunched: design.depthM.support !== design.depthM.midspan,
+    prestressed: quantitiesOf(design.lines).prestressKg > 0,
+    supportDepthM: design.depthM.support,
+    midspanDepthM: design.depthM.midspan,
+    limitingUtilisation: Math.max(...option.designs.map((d) => d.limitingCheck.utilisation)),
+    clearanceConfirmed: clearances.every((clearance) => clearance.confirmed),
+    upliftKN: upliftKN(option),
+    pieceLengthM: Math.max(0, ...pieces.map((piece) => piece.lengthM)),
+    pieceMassT: Math.max(0, ...pieces.map((piece) => piece.massT)),
+    haulLengthM: access.haulLengthM,
+    haulMassT: access.haulMassT,
+    budgetChance,
+    roadRiseM: Math.max(option.profile.startRiseM, option.profile.endRiseM),
+    roadMayRiseM: site.road.mayRiseM,
+    gradient: Math.abs(option.profile.gradient),
+    maxGradient: site.road.maxGradient,
+  };
+  if (headroom) known['headroomSpareM'] = headroom.spareM;
+  for (const id of ['trussHeightM', 'pylonHeightM', 'boxInnerHeightM'] as const) {
+    if (figures[id] !== undefined) known[id] = figures[id];
+  }
+  return known;
+}

@@ -1,0 +1,43 @@
+import { spansOf } from '../appraise/workOption.ts';
+import type { Appraisal, AppraisedOption } from '../model/index.ts';
+import { rounded } from './rounded.ts';
+
+function optionJson(option: AppraisedOption): object {
+  return {
+    number: option.number,
+    form: option.form,
+    family: option.family,
+    method: option.method,
+    units: option.units.map((unit) => ({ form: unit.form, spans: spansOf(unit) })),
+    spans: option.units.flatMap(spansOf),
+    supports: option.supports.map(({ chainageM, kind, heightM }) => ({ chainageM, kind, heightM })),
+    depthM: option.depthM,
+    status: option.status,
+    rulings: option.rulings,
+    headroomSpareM: option.headroom?.spareM,
+    road: option.profile,
+    quantities: option.quantities,
+    perM2: option.perM2,
+    supportQuantities: option.supportQuantities,
+    cost: option.cost,
+    pricePerM2: option.pricePerM2,
+    parts: option.parts,
+    months: option.months,
+    limitingCheck: option.limitingCheck.id,
+    limitingUtilisation: option.limitingCheck.utilisation,
+  };
+}
+
+/** The appraisal as the command line prints it: plain JSON, figures at six significant places, dearest last. */
+export function appraisalJson(appraisal: Appraisal): object {
+  return rounded({
+    study: appraisal.study,
+    options: appraisal.options.map(optionJson),
+    currency: appraisal.currency,
+    dropped: appraisal.dropped,
+    droppedCounts: appraisal.droppedCounts,
+    register: appraisal.register,
+    retired: appraisal.retired,
+    standing: appraisal.standing,
+  });
+}
