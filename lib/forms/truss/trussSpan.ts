@@ -1,0 +1,196 @@
+import {
+  loadStandard,
+  rigidCrossbeam,
+  steelYield,
+  trafficOnGirder,
+  usualSteel,
+  worstLaneShare,
+  type LoadStandard,
+  type TrafficLoad,
+} from '../../actions/index.ts';
+import type { UnitTask } from '../../model/index.ts';
+import { fatigueLimitMPa } from '../floor/fatigue.ts';
+import { sizeFloor, type Floor } from '../floor/sizeFloor.ts';
+import { panelForces } from './panelForces.ts';
+import { sizeTruss, type SizedTruss } from './sizeTruss.ts';
+import type { TrussCase } from './trussCase.ts';
+import { trussData } from './trussData.ts';
+import { trussDeflection } from './trussDeflection.ts';
+import { trussGeometry } from './trussGeometry.ts';
+
+/** One simple span: two trusses, their bracing and the floor between them. */
+export interface TrussSpan {
+  readonly spanM: number;
+  readonly planesM: number;
+  readonly memberWidthM: number;
+  readonly truss: SizedTruss;
+  readonly floor: Floor;
+  readonly traffic: TrafficLoad;
+  readonly deflectionM: number;
+  readonly deflectionLimitM: number;
+  /** All structural steel of the span, kg. */
+  readonly steelKg: number;
+}
+
+/**
+ * Through-truss span of least steel: floor panels of 5 to 9 m, Warren panels with or without hangers by the slope of
+ * their diagonals, heights of span/10 to span/6. Layouts in which every member fits are preferred to lighter ones in
+ * which one does not.
+ */
+export function trussSpan(spanM: number, task: UnitTask): TrussSpan {
+  const standard = loadStandard(task.standard);
+  const { deck } = task;
+  const { memberWidth, planeGapM } = trussData;
+  const memberWidthM = Math.min(
+    memberWidth.mostM,
+    Math.max(memberWidth.leastM, Math.round(memberWidth.ofSpan * spanM * 20) / 20),
+  );
+  const planesM = deck.widthM + 2 * planeGapM.value + memberWidthM;
+  const planes = [-planesM / 2, planesM / 2];
+  const loads = [0, 1].map((k) => trafficOnGirder(task.standard, deck, planes, k));
+  const heavier = spanLoad(loads[0]!, spanM) >= spanLoad(loads[1]!, spanM) ? 0 : 1;
+  const traffic = loads[heavier]!;
+  const fatigueShare = worstLaneShare(task.standard, deck, rigidCrossbeam(planes, heavier));
+
+  let best: Candidate | null = null;
+  for (const panels of panelCounts(spanM)) {
+    const floor = sizeFloor({
+      standard: task.standard,
+      deck,
+      planesM,
+      crossSpacingM: spanM / panels,
+      depthM: task.depthM,
+      stringers: true,
+    });
+    const c = trussCase(task, standard, floor, planesM, memberWidthM);
+    for (const hangers of [false, true]) {
+      const heights = heightsFor(spanM, panels, hangers);
+      if (heights.length === 0) continue;
+      const forces = panelForces(spanM, panels, hangers, traffic, fatigueShare);
+      let ownKNm: number | undefined;
+      // Steel against height has one valley, with ripples from plate steps: walk down it from a lower middle height, two steps ahead.
+      const tried = new Map<number, Candidate>();
+      const at = (k: number): Candidate | null => {
+        const heightM = heights[k];
+        if (heightM === undefined) return null;
+        const known = tried.get(k);
+        if (known) return known;
+        const truss = sizeTruss(trussGeometry(spanM, heightM, panels, hangers), forces, c, ownKNm);
+        ownKNm = truss.ownKNm;
+        const candidate = { truss, floor, steelKg: steelOf(truss, floor, planesM) };
+        tried.set(k, candidate);
+        return candidate;
+      };
+      let k = Math.floor((heights.length - 1) / 3);
+      for (;;) {
+        const next = [k - 1, k + 1, k - 2, k + 2].find((other) => {
+          const candidate = at(other);
+          return candidate !== null && isBetter(candidate, at(k)!);
+        });
+        if (next === undefined) break;
+        k = next;
+      }
+      const valley = at(k)!;
+      if (best === null || isBetter(valley, best)) best = valley;
+    }
+  }
+  if (best === null) throw new RangeError(`truss: expected a span of 10 m or more, received ${spanM} m`);
+  return {
+    ...best,
+    spanM,
+    planesM,
+    memberWidthM,
+    traffic,
+    deflectionM: trussDeflection(best.truss, standard, traffic),
+    deflectionLimitM: spanM / standard.deflection.limitRatio,
+  };
+}
+
+/** Steel of a span: one more cross-girder than panels. */
+function steelOf(truss: SizedTruss, floor: Floor, planesM: number): number {
+  const { spanM } = truss.geometry;
+  return (
+    2 * truss.planeKg +
+    truss.bracing.massKg +
+    floor.steelKgPerM * spanM +
+    floor.crossGirder.massKgPerM * planesM
+  );
+}
+
+/** One layout: panels, height and whether there are hangers. */
+interface Candidate {
+  readonly truss: SizedTruss;
+  readonly floor: Floor;
+  readonly steelKg: number;
+}
+
+function isBetter(a: Candidate, b: Candidate): boolean {
+  const use = Math.max(1, a.truss.worst.section.utilisation);
+  const bestUse = Math.max(1, b.truss.worst.section.utilisation);
+  return use < bestUse - 1e-9 || (use <= bestUse + 1e-9 && a.steelKg < b.steelKg);
+}
+
+function trussCase(
+  task: UnitTask,
+  standard: LoadStandard,
+  floor: Floor,
+  planesM: number,
+  memberWidthM: number,
+): TrussCase {
+  const grade = usualSteel(task.standard);
+  const yields = Array.from({ length: trussData.plateMm.most + 1 }, (_, mm) =>
+    steelYield(grade, Math.max(1, mm)),
+  );
+  return {
+    standardId: task.standard,
+    standard,
+    rules: {
+      standard: task.standard,
+      yieldMPa: (thicknessMm) => yields[Math.ceil(thicknessMm)]!,
+      rangeMPa: fatigueLimitMPa(task.standard, 'gusset'),
+    },
+    loads: {
+      floorKNm: (floor.slabKNm + floor.steelKNm) / 2,
+      superimposedKNm: task.deck.superimposedKNm / 2,
+    },
+    memberWidthM,
+    planesM,
+    floorDepthM: task.depthM,
+  };
+}
+
+/** Numbers of floor panels tried: the fewest, the most and one between, of those with panels in the usual range. */
+function panelCounts(spanM: number): number[] {
+  const { least, most } = trussData.panelM;
+  const fewest = Math.max(4, Math.ceil(spanM / most - 1e-9));
+  const greatest = Math.max(fewest, Math.floor(spanM / least + 1e-9));
+  const counts = new Set<number>();
+  for (const share of [0, 0.25, 0.6]) {
+    const n = Math.round(fewest + share * (greatest - fewest));
+    counts.add(n % 2 === 0 ? n : n + 1);
+  }
+  return [...counts];
+}
+
+/** Heights tried, m, those whose diagonals lie in the usual range of slopes. */
+function heightsFor(spanM: number, panels: number, hangers: boolean): number[] {
+  const { heightOverSpan, leastHeightM, diagonalSlopeDeg } = trussData;
+  const reach = hangers ? spanM / panels : spanM / panels / 2;
+  const least = Math.max(leastHeightM.value, heightOverSpan.least * spanM);
+  const most = Math.max(least, heightOverSpan.most * spanM);
+  const heights: number[] = [];
+  for (const share of [0, 0.25, 0.5, 0.75, 1]) {
+    const heightM = least + share * (most - least);
+    const slope = (Math.atan2(heightM, reach) * 180) / Math.PI;
+    const inRange = slope >= diagonalSlopeDeg.least && slope <= diagonalSlopeDeg.most;
+    // Short spans under the least height stand steeper than usual; they are allowed as they are, without hangers.
+    const steepButShort = !hangers && slope > diagonalSlopeDeg.most && heightM <= leastHeightM.value;
+    if ((inRange || steepButShort) && !heights.includes(heightM)) heights.push(heightM);
+  }
+  return heights;
+}
+
+/** Weight of a traffic load on a span, for telling which plane is worse off. */
+function spanLoad(load: TrafficLoad, spanM: number): number {
+  return load.vehicleFactor * 600 + ((load.udlKNm + load.footwayKNm) * spanM) / 2;
+}
