@@ -15,6 +15,7 @@ const rules = z.strictObject({
     source: z.string(),
   }),
   rangeMPa: z.strictObject({
+    plain: z.number(),
     gusset: z.number(),
     stiffener: z.number(),
     stay: z.number(),
