@@ -1,0 +1,55 @@
+import type { CostTable, Site } from '../model/index.ts';
+import type { Candidate } from './candidate.ts';
+import { continuousCandidates } from './continuous.ts';
+import { counter, type Counter } from './counter.ts';
+import { frameOf, type Frame } from './frame.ts';
+import { mainUnitCandidates } from './mainUnits.ts';
+import { polish } from './polish.ts';
+import { flatTable, relaxationsOf } from './relaxations.ts';
+import type { ArrangeRequest, ArrangeResult } from './request.ts';
+import { select } from './select.ts';
+
+function candidatesOf(
+  request: ArrangeRequest,
+  frame: Frame,
+  table: CostTable,
+  dropped: Counter,
+  enough = Infinity,
+): Candidate[] {
+  return request.pattern.kind === 'continuous'
+    ? continuousCandidates(request, frame, table, dropped, enough)
+    : mainUnitCandidates(request, frame, table, dropped);
+}
+
+function frameFor(request: ArrangeRequest, site: Site, table: CostTable): Frame {
+  return frameOf(site, request.pierHalfWidthM, request.form, table, request.windows.minSpanM);
+}
+
+function fits(request: ArrangeRequest, site: Site): boolean {
+  const frame = frameFor(request, site, flatTable);
+  return candidatesOf(request, frame, flatTable, counter(), 1).length > 0;
+}
+
+/**
+ * The best different arrangements of one form on one site by the cost table: the cheapest for each number of supports
+ * (and of pylons), at most `keep` of them, cheapest first. Supports stand on a grid of 1 m and on the edges of zones,
+ * never in a hard zone widened by half a pier. Nothing is priced here: the table is all that is known of cost. A
+ * mirrored site with a mirrored table gives the mirrored arrangements. When nothing fits, the list is empty and
+ * `relaxations` says what to give way on, smallest first.
+ * Throws RangeError on reversed windows and on a pattern with approaches when the approach windows are missing.
+ */
+export function arrange(request: ArrangeRequest, site: Site, table: CostTable): ArrangeResult {
+  const { form, method } = request;
+  const dropped = counter();
+  const frame = frameFor(request, site, table);
+  const candidates = candidatesOf(request, frame, table, dropped);
+  const kept = select(candidates, request.keep ?? 3, frame, site, table, dropped).map((best) =>
+    polish(best, request, frame, site, table),
+  );
+  kept.sort((a, b) => a.cost - b.cost);
+  return {
+    arrangements: kept.map(({ units, cost }) => ({ form, method, units, tableCost: cost })),
+    dropped: dropped.list(form),
+    relaxations: kept.length > 0 ? [] : relaxationsOf(request, site, fits),
+  };
+}

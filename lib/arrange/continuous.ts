@@ -1,0 +1,76 @@
+import type { CostTable } from '../model/index.ts';
+import type { Candidate } from './candidate.ts';
+import type { Counter } from './counter.ts';
+import { supportCosts } from './curves.ts';
+import type { Frame } from './frame.ts';
+import { limitsOf, spanFault, type Limits } from './limits.ts';
+import type { ArrangeRequest } from './request.ts';
+import { fewestSpans, governingSpans, mostSpans, searchUnit, type UnitTask } from './unitSearch.ts';
+
+/** Why a number of spans cannot be laid out with one governing span: open ground first, then the barred stretches. */
+function reasonFor(frame: Frame, limits: Limits, spans: number, governingM: number): string {
+  const interior = Math.max(limits.minSpacingM, limits.interiorLeast * governingM);
+  const shortest =
+    spans < 3
+      ? spans * limits.minSpacingM
+      : (spans - 2) * interior + 2 * Math.max(limits.minSpacingM, limits.endLeast * interior);
+  if (shortest > frame.lengthM) return 'span outside the band of the form';
+  const even = (frame.lengthM - Math.max(spans - 2, 0) * governingM) / 2;
+  for (let i = 0; i < spans - 1; i += 1) {
+    const x = even + i * governingM;
+    const hit = frame.barred.find(({ fromM, toM }) => x > fromM && x < toM);
+    if (hit !== undefined) return `support in a barred stretch: ${hit.name}`;
+  }
+  return frame.barred.length > 0 ? 'support in a barred stretch' : 'end span outside its window';
+}
+
+/**
+ * Every arrangement of one continuous unit from abutment to abutment that the search considers: the cheapest for each
+ * number of spans and each governing span; the search ends once `enough` are found. What cannot be laid out is counted
+ * by reason.
+ */
+export function continuousCandidates(
+  request: ArrangeRequest,
+  frame: Frame,
+  table: CostTable,
+  dropped: Counter,
+  enough = Infinity,
+): Candidate[] {
+  const limits = limitsOf(request.windows);
+  const last = frame.X.length - 1;
+  const { form } = request;
+  const most = Math.min(limits.maxSpanM, frame.lengthM);
+  const supports = supportCosts(table, form, frame, Math.min(limits.minSpacingM, most), most);
+  const task: UnitTask = {
+    form,
+    X: frame.X,
+    firstEnd: last,
+    lastEnd: last,
+    limits,
+    supports,
+    endIsPier: false,
+  };
+  const found: Candidate[] = [];
+  const laid = new Set<string>();
+  const seen = new Set<string>();
+  searchUnit(task, table, (end, spans, governingM, estimate, trace) => {
+    laid.add(`${governingM} ${spans}`);
+    const at = trace(end, spans);
+    const name = at.join();
+    if (seen.has(name)) return true;
+    seen.add(name);
+    const fault = spanFault(
+      at.slice(1).map((i, s) => frame.X[i]! - frame.X[at[s]!]!),
+      limits,
+    );
+    if (fault === null) found.push({ placed: [{ form, role: 'main', at }], estimate });
+    else dropped.add(fault);
+    return found.length < enough;
+  });
+  for (const governingM of governingSpans(task)) {
+    for (let k = fewestSpans(limits, frame.lengthM, governingM); k <= mostSpans(task, governingM); k += 1) {
+      if (!laid.has(`${governingM} ${k}`)) dropped.add(reasonFor(frame, limits, k, governingM));
+    }
+  }
+  return found;
+}

@@ -1,0 +1,101 @@
+import type { CostTable, FormId } from '../model/index.ts';
+import { chainageOf, type Frame } from './frame.ts';
+
+/**
+ * A support in a soft zone costs this much more in the search, so that it is chosen only where it saves more than that.
+ * Common practice, no source: access, protection and consents of a place better left alone.
+ */
+export const SOFT_ZONE_EXTRA = 0.25;
+
+/** Even spans are preferred among equals: weight of the square of a span against the cost of the deck. */
+const EVEN = 1e-7;
+
+/** Cost of one span by its length, money, at each whole metre, for one governing span. */
+export type SpanCosts = Float64Array;
+
+/** Cost of spans of one form read off the table once per governing span. */
+export function spanCosts(table: CostTable, form: FormId, governingM: number): SpanCosts {
+  const last = Math.ceil(governingM) + 1;
+  const stride = Math.max(1, Math.ceil(last / 100));
+  const costs = new Float64Array(last + 1);
+  const even = EVEN * table.deckPerM(form, governingM, governingM);
+  let before = 0;
+  let rateBefore = 0;
+  for (let s = 1; s <= last; s = s === last ? last + 1 : Math.min(s + stride, last)) {
+    const rate = table.deckPerM(form, Math.min(s, governingM), governingM);
+    for (let t = before + 1; t <= s; t += 1) {
+      const share = before === 0 ? 1 : (t - before) / (s - before);
+      costs[t] = t * (rateBefore + share * (rate - rateBefore)) + even * t * t;
+    }
+    before = s;
+    rateBefore = rate;
+  }
+  return costs;
+}
+
+/** Reads `spanCosts` between whole metres. */
+export function spanCostAt(costs: SpanCosts, spanM: number): number {
+  const i = spanM | 0;
+  return costs[i]! + (spanM - i) * (costs[i + 1]! - costs[i]!);
+}
+
+/** Half the cost of a support as the cost of one adjoining span ends on it: A + B x span, per candidate position. */
+export interface HalfCosts {
+  readonly A: Float64Array;
+  readonly B: Float64Array;
+}
+
+/** Costs of a support of one form at every candidate position for a few equal spans on both sides. */
+export interface SupportCosts {
+  readonly knots: readonly number[];
+  readonly C: readonly Float64Array[];
+}
+
+/** Reads the support costs of one form off the table, at four spans from `leastM` to `mostM`. */
+export function supportCosts(
+  table: CostTable,
+  form: FormId,
+  frame: Frame,
+  leastM: number,
+  mostM: number,
+): SupportCosts {
+  const growth = Math.cbrt(Math.max(mostM / leastM, 1.01));
+  const knots = [0, 1, 2, 3].map((k) => leastM * growth ** k);
+  const { X, soft } = frame;
+  const C = knots.map((span) =>
+    Float64Array.from(
+      X,
+      (x, i) => table.support(form, chainageOf(frame, x), span, span) * (1 + SOFT_ZONE_EXTRA * soft[i]!),
+    ),
+  );
+  return { knots, C };
+}
+
+function knotBefore(knots: readonly number[], span: number): number {
+  let k = 0;
+  while (k < knots.length - 2 && knots[k + 1]! < span) k += 1;
+  return k;
+}
+
+/**
+ * Splits support costs between the two spans beside a support, straight in the span between `fromM` and `toM`: exact
+ * where the cost of a support grows evenly with the sum of its spans, which is what piers and foundations nearly do.
+ */
+export function halfCosts(costs: SupportCosts, fromM: number, toM: number): HalfCosts {
+  const { knots, C } = costs;
+  const n = C[0]!.length;
+  const A = new Float64Array(n);
+  const B = new Float64Array(n);
+  const low = knotBefore(knots, fromM);
+  const high = knotBefore(knots, toM);
+  const shareLow = (fromM - knots[low]!) / (knots[low + 1]! - knots[low]!);
+  const shareHigh = (toM - knots[high]!) / (knots[high + 1]! - knots[high]!);
+  const width = Math.max(toM - fromM, 1e-6);
+  for (let i = 0; i < n; i += 1) {
+    const first = C[low]![i]! + shareLow * (C[low + 1]![i]! - C[low]![i]!);
+    const last = C[high]![i]! + shareHigh * (C[high + 1]![i]! - C[high]![i]!);
+    B[i] = (last - first) / width / 2;
+    A[i] = first / 2 - B[i]! * fromM;
+  }
+  return { A, B };
+}

@@ -1,0 +1,155 @@
+import type { CostTable, FormId } from '../model/index.ts';
+import { approachesTo, type Approach } from './approaches.ts';
+import type { Candidate, PlacedUnit } from './candidate.ts';
+import type { Counter } from './counter.ts';
+import { halfCosts, supportCosts, type SupportCosts } from './curves.ts';
+import type { Frame } from './frame.ts';
+import { limitsOf, SLACK, type Limits } from './limits.ts';
+import type { MainLayout, MainSearch } from './mainSearch.ts';
+import { pylonLayouts } from './pylons.ts';
+import type { ArrangeRequest } from './request.ts';
+import { simpleLayouts } from './simpleMain.ts';
+
+/** Without a barred stretch and above this many positions the main span goes over the middle of the crossing. */
+const MANY = 700;
+/** Places tried on each side of the opening, at most. */
+const PLACES = 160;
+
+/** More than any number of spans or metres of main span: keeps the parts of a key apart. */
+const MOST_SPANS = 2 ** 15;
+
+/** At most `PLACES` of the indices first..last, both ends among them. */
+function places(first: number, last: number): number[] {
+  if (last < first) return [];
+  const stride = Math.ceil((last - first + 1) / PLACES);
+  const all: number[] = [];
+  for (let i = first; i <= last; i += stride) all.push(i);
+  if (all.at(-1) !== last) all.push(last);
+  return all;
+}
+
+function firstAtLeast(X: Float64Array, x: number): number {
+  let i = 0;
+  while (i < X.length && X[i]! < x - 1e-6) i += 1;
+  return i;
+}
+
+function lastAtMost(X: Float64Array, x: number): number {
+  let i = X.length - 1;
+  while (i >= 0 && X[i]! > x + 1e-6) i -= 1;
+  return i;
+}
+
+function backwards(costs: SupportCosts): SupportCosts {
+  return { knots: costs.knots, C: costs.C.map((column) => Float64Array.from(column).reverse()) };
+}
+
+/** Approaches read from the far abutment, with indices turned round so that they rise again. */
+function approachesFromEnd(
+  form: FormId,
+  X: Float64Array,
+  first: number,
+  last: number,
+  limits: Limits,
+  supports: SupportCosts,
+  table: CostTable,
+): Approach[][] {
+  const n = X.length;
+  const lengthM = X[n - 1]!;
+  const turned = Float64Array.from(X, (_, i) => lengthM - X[n - 1 - i]!);
+  const lists = approachesTo(form, turned, n - 1 - last, n - 1 - first, limits, backwards(supports), table);
+  return lists.reverse().map((list) => list.map((a) => ({ ...a, at: a.at.map((i) => n - 1 - i).reverse() })));
+}
+
+/** How far a main unit may reach beyond its main span, as a share of that. */
+function reachOf({ pattern }: ArrangeRequest): number {
+  return pattern.kind === 'pylon' ? Math.max(pattern.onePylonBack[1], pattern.twoPylonSide[1]) : 0;
+}
+
+interface Ranges {
+  readonly left: readonly [number, number];
+  readonly right: readonly [number, number];
+  readonly outerLeft: readonly [number, number];
+  readonly outerRight: readonly [number, number];
+}
+
+function rangesOf(frame: Frame, limits: Limits, reach: number): Ranges {
+  const { X, opening, lengthM } = frame;
+  const n = X.length;
+  if (opening === null && n <= MANY) {
+    const all = [0, n - 1] as const;
+    return { left: all, right: all, outerLeft: all, outerRight: all };
+  }
+  const { fromM, toM } = opening ?? { fromM: lengthM / 2, toM: lengthM / 2 };
+  const inner = limits.maxSpanM;
+  const left = [firstAtLeast(X, toM - inner), lastAtMost(X, fromM)] as const;
+  const right = [firstAtLeast(X, toM), lastAtMost(X, fromM + inner)] as const;
+  const outerLeft = [firstAtLeast(X, toM - inner * (1 + reach)), left[1]] as const;
+  const outerRight = [right[0], lastAtMost(X, fromM + inner * (1 + reach))] as const;
+  return { left, right, outerLeft, outerRight };
+}
+
+/**
+ * Arrangements of a main unit over the opening with approach units where needed: the cheapest for each number of
+ * supports, number of pylons and metre of main span. Throws RangeError when the windows of the approach form are missing.
+ */
+export function mainUnitCandidates(
+  request: ArrangeRequest,
+  frame: Frame,
+  table: CostTable,
+  dropped: Counter,
+): Candidate[] {
+  const { pattern, form, approach } = request;
+  if (pattern.kind === 'continuous' || approach === undefined) {
+    throw new RangeError('approach: expected the windows of the approach form');
+  }
+  const limits = limitsOf(request.windows);
+  const approachLimits = limitsOf(approach);
+  const { X } = frame;
+  const ranges = rangesOf(frame, limits, reachOf(request));
+  const left = places(...ranges.left);
+  const right = places(...ranges.right);
+  const inBand = (spanM: number): boolean =>
+    spanM >= limits.minSpanM - SLACK && spanM <= limits.maxSpanM + SLACK;
+  if (!left.some((a) => right.some((b) => inBand(X[b]! - X[a]!)))) {
+    dropped.add('span outside the band of the form');
+    return [];
+  }
+  const most = Math.min(limits.maxSpanM, frame.lengthM);
+  const least = Math.min(approachLimits.minSpacingM, most);
+  const own = halfCosts(supportCosts(table, form, frame, least, most), least, most);
+  const approachMost = Math.max(Math.min(approachLimits.maxSpanM, frame.lengthM), least);
+  const supports = supportCosts(table, pattern.approach, frame, least, approachMost);
+  const best = new Map<number, MainLayout>();
+  const search: MainSearch = {
+    request,
+    limits,
+    X,
+    table,
+    half: (index, spanM) => own.A[index]! + own.B[index]! * spanM,
+    left,
+    right,
+    outerLeft: places(...ranges.outerLeft),
+    outerRight: places(...ranges.outerRight),
+    toLeft: approachesTo(pattern.approach, X, ...ranges.outerLeft, approachLimits, supports, table),
+    toRight: approachesFromEnd(pattern.approach, X, ...ranges.outerRight, approachLimits, supports, table),
+    offer(layout) {
+      const spans = layout.before.spans + layout.after.spans + layout.at.length - 1;
+      const key = (layout.pylons.length * MOST_SPANS + spans) * MOST_SPANS + Math.round(layout.mainM);
+      const known = best.get(key);
+      if (known === undefined || layout.cost < known.cost * (1 - 1e-9)) best.set(key, layout);
+    },
+    noApproach: () => dropped.add('no approach spans within their windows'),
+  };
+  if (pattern.kind === 'pylon') pylonLayouts(search, pattern);
+  else simpleLayouts(search);
+  const found: Candidate[] = [];
+  for (const { at, pylons, before, after, cost } of best.values()) {
+    const placed: PlacedUnit[] = [];
+    if (before.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: before.at });
+    placed.push(pylons.length > 0 ? { form, role: 'main', at, pylons } : { form, role: 'main', at });
+    if (after.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: after.at });
+    found.push({ placed, estimate: cost });
+  }
+  return found;
+}

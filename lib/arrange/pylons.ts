@@ -1,0 +1,130 @@
+import type { Pattern } from '../model/index.ts';
+import type { Approach } from './approaches.ts';
+import { spanCostAt, spanCosts, type SpanCosts } from './curves.ts';
+import { SLACK } from './limits.ts';
+import type { MainSearch } from './mainSearch.ts';
+
+/** A side or back span with the approach beyond it. */
+interface Side {
+  readonly end: number;
+  readonly cost: number;
+  readonly approach: Approach;
+}
+
+const KEPT = 3;
+
+/**
+ * Cheapest ends of the span beyond a pylon, each with its approach, at most one for each number of approach spans:
+ * the span over the main span lies in `window`.
+ */
+function sidesBeyond(
+  search: MainSearch,
+  pylon: number,
+  mainM: number,
+  window: readonly [number, number],
+  row: SpanCosts,
+  toLeft: boolean,
+): Side[] {
+  const { X } = search;
+  const ends = toLeft ? search.outerLeft : search.outerRight;
+  const approaches = toLeft ? search.toLeft : search.toRight;
+  const last = X.length - 1;
+  const least = window[0] * mainM - SLACK;
+  const most = Math.min(window[1], 1) * mainM + SLACK;
+  const best: Side[] = [];
+  for (const end of ends) {
+    const span = toLeft ? X[pylon]! - X[end]! : X[end]! - X[pylon]!;
+    if (span < least || span > most) continue;
+    const lists = approaches[end]!;
+    if (lists.length === 0) continue;
+    const pier = end > 0 && end < last ? search.half(end, span) : 0;
+    const own = spanCostAt(row, span) + search.half(pylon, span) + pier;
+    for (const approach of lists) {
+      const cost = own + approach.cost;
+      const same = best.findIndex((side) => side.approach.spans === approach.spans);
+      if (same < 0) best.push({ end, cost, approach });
+      else if (cost < best[same]!.cost * (1 - 1e-9)) best[same] = { end, cost, approach };
+    }
+  }
+  best.sort((a, b) => a.cost - b.cost || a.approach.spans - b.approach.spans);
+  return best.slice(0, KEPT);
+}
+
+interface Main {
+  readonly a: number;
+  readonly b: number;
+  readonly mainM: number;
+  readonly row: SpanCosts;
+  /** Deck of the main span and fixed cost of the unit. */
+  readonly own: number;
+}
+
+/** One pylon at one end of the main span; the other end is the end of the unit. */
+function onePylon(
+  search: MainSearch,
+  main: Main,
+  back: readonly [number, number],
+  pylonLeft: boolean,
+): boolean {
+  const { X, half } = search;
+  const { a, b, mainM, row } = main;
+  const pylon = pylonLeft ? a : b;
+  const far = pylonLeft ? b : a;
+  const beyond = pylonLeft ? search.toRight[far]! : search.toLeft[far]!;
+  if (beyond.length === 0 || pylon === 0 || pylon === X.length - 1) return false;
+  const sides = sidesBeyond(search, pylon, mainM, back, row, pylonLeft);
+  const pier = far > 0 && far < X.length - 1 ? half(far, mainM) : 0;
+  for (const side of sides) {
+    for (const approach of beyond) {
+      const cost = main.own + half(pylon, mainM) + pier + side.cost + approach.cost;
+      const at = pylonLeft ? [side.end, pylon, far] : [far, pylon, side.end];
+      const [before, after] = pylonLeft ? [side.approach, approach] : [approach, side.approach];
+      search.offer({ at, pylons: [1], mainM, cost, before, after });
+    }
+  }
+  return sides.length > 0;
+}
+
+/** A pylon at both ends of the main span. */
+function twoPylons(search: MainSearch, main: Main, window: readonly [number, number]): boolean {
+  const { X, half } = search;
+  const { a, b, mainM, row } = main;
+  if (a === 0 || b === X.length - 1) return false;
+  const lefts = sidesBeyond(search, a, mainM, window, row, true);
+  if (lefts.length === 0) return false;
+  const rights = sidesBeyond(search, b, mainM, window, row, false);
+  for (const left of lefts) {
+    for (const right of rights) {
+      const cost = main.own + half(a, mainM) + half(b, mainM) + left.cost + right.cost;
+      const at = [left.end, a, b, right.end];
+      search.offer({ at, pylons: [1, 2], mainM, cost, before: left.approach, after: right.approach });
+    }
+  }
+  return rights.length > 0;
+}
+
+/** Main units hung from one pylon (on either side of the opening) or two: every pair of places in the span band. */
+export function pylonLayouts(search: MainSearch, pattern: Extract<Pattern, { kind: 'pylon' }>): void {
+  const { X, limits, left, right, table, request } = search;
+  const rows = new Map<number, SpanCosts>();
+  for (const a of left) {
+    for (const b of right) {
+      const mainM = X[b]! - X[a]!;
+      if (!(mainM >= limits.minSpanM - SLACK && mainM <= limits.maxSpanM + SLACK)) continue;
+      const whole = Math.ceil(mainM - SLACK);
+      let row = rows.get(whole);
+      if (row === undefined) {
+        row = spanCosts(table, request.form, whole);
+        rows.set(whole, row);
+      }
+      const own = spanCostAt(row, mainM) + table.unitFixed(request.form, mainM);
+      const main = { a, b, mainM, row, own };
+      const laid = [
+        onePylon(search, main, pattern.onePylonBack, true),
+        onePylon(search, main, pattern.onePylonBack, false),
+        twoPylons(search, main, pattern.twoPylonSide),
+      ];
+      if (!laid.includes(true)) search.noApproach();
+    }
+  }
+}

@@ -1,0 +1,65 @@
+import type { CostTable, FormId, Site, Unit } from '../model/index.ts';
+import { SOFT_ZONE_EXTRA } from './curves.ts';
+import { SAME_M } from './frame.ts';
+
+/** A support between two spans, with the form that stands on it. */
+interface Standing {
+  readonly chainageM: number;
+  readonly form: FormId;
+  readonly leftM: number;
+  readonly rightM: number;
+}
+
+function inSoftZone(site: Site, chainageM: number): boolean {
+  return site.zones.some(
+    ({ hard, fromM, toM }) => !hard && chainageM > fromM + SAME_M && chainageM < toM - SAME_M,
+  );
+}
+
+/** Intermediate supports of a row of units; one between two units belongs to the main unit. */
+function standings(units: readonly Unit[]): Standing[] {
+  const all: Standing[] = [];
+  units.forEach((unit, u) => {
+    const before = units[u - 1];
+    unit.supportsM.forEach((chainageM, i) => {
+      if (i === unit.supportsM.length - 1) return;
+      const rightM = unit.supportsM[i + 1]! - chainageM;
+      if (i > 0) all.push({ chainageM, form: unit.form, leftM: chainageM - unit.supportsM[i - 1]!, rightM });
+      else if (before !== undefined) {
+        const form = before.role === 'main' ? before.form : unit.form;
+        all.push({ chainageM, form, leftM: chainageM - before.supportsM.at(-2)!, rightM });
+      }
+    });
+  });
+  return all;
+}
+
+/** Longest span of a unit, m: the one that governs its depth. */
+export function governingSpan(unit: Unit): number {
+  return unit.supportsM.reduce(
+    (longest, x, i) => (i === 0 ? 0 : Math.max(longest, x - unit.supportsM[i - 1]!)),
+    0,
+  );
+}
+
+/**
+ * Cost of a row of units on the cost table, money: decks at the governing span of each unit, fixed costs, and every
+ * intermediate support, dearer by `SOFT_ZONE_EXTRA` in a soft zone. Abutments are the same for every arrangement and
+ * are left out. For ordering only.
+ */
+export function tableCost(units: readonly Unit[], site: Site, table: CostTable): number {
+  let cost = 0;
+  for (const unit of units) {
+    const governingM = governingSpan(unit);
+    cost += table.unitFixed(unit.form, governingM);
+    for (let i = 1; i < unit.supportsM.length; i += 1) {
+      const span = unit.supportsM[i]! - unit.supportsM[i - 1]!;
+      cost += span * table.deckPerM(unit.form, span, governingM);
+    }
+  }
+  for (const { chainageM, form, leftM, rightM } of standings(units)) {
+    const extra = inSoftZone(site, chainageM) ? SOFT_ZONE_EXTRA : 0;
+    cost += table.support(form, chainageM, leftM, rightM) * (1 + extra);
+  }
+  return cost;
+}
