@@ -3,8 +3,8 @@ export { evaluate, type Evaluated, type Truth } from './evaluate.ts';
 export { flip } from './flip.ts';
 export { cite, printed } from './reason.ts';
 export type { Condition, Fact, Rule, Source, Subject } from './rule.ts';
-export { checkFacts, missingFacts, rulingsFor, type MissingFact } from './rulingsFor.ts';
-export { statusFlip, statusOf } from './statusOf.ts';
+export { checkFacts, missingFacts, rulingOf, rulingsFor, type MissingFact } from './rulingsFor.ts';
+export { statusChange, statusFlip, statusOf } from './statusOf.ts';
 export {
   depthBand,
   depthMeasure,
@@ -18,3 +18,5 @@ export {
   type DepthMeasure,
   type Interval,
 } from './windows.ts';
+export { withRatios } from './withRatios.ts';
+export { verdictOf, wholeCondition, type Verdict } from './verdictOf.ts';

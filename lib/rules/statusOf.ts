@@ -1,6 +1,7 @@
 import type { AskedOf, Facts, Flip, FormId, Ruling, Status } from '../model/index.ts';
 import { rule, rulesFor } from './book.ts';
 import { nearestChange } from './flip.ts';
+import type { Rule } from './rule.ts';
 import { checkFacts } from './rulingsFor.ts';
 import { verdictOf, wholeCondition } from './verdictOf.ts';
 import { withRatios } from './withRatios.ts';
@@ -19,6 +20,24 @@ export function statusOf(rulings: readonly Pick<Ruling, 'rule' | 'effect'>[]): S
 }
 
 /**
+ * The nearest change of one known number after which the status that some rules leave is another.
+ *
+ * @param asked the rules that are asked
+ * @param facts ratios included, see `withRatios`
+ * @returns undefined where no single known number changes it
+ */
+export function statusChange(asked: readonly Rule[], facts: Facts): Flip | undefined {
+  return nearestChange(asked.map(wholeCondition), facts, (changed) =>
+    statusOf(
+      asked.flatMap((entry) => {
+        const verdict = verdictOf(entry, changed);
+        return verdict === null ? [] : [{ rule: entry.id, effect: verdict.effect }];
+      }),
+    ),
+  );
+}
+
+/**
  * The nearest change of one known number after which the status of a form or an option is another.
  *
  * @returns undefined where no single known number changes it
@@ -30,13 +49,5 @@ export function statusFlip(
   facts: Facts,
 ): Flip | undefined {
   checkFacts(facts);
-  const asked = rulesFor(form, typeof askedOf === 'string' ? [askedOf] : askedOf);
-  return nearestChange(asked.map(wholeCondition), withRatios(facts), (changed) =>
-    statusOf(
-      asked.flatMap((entry) => {
-        const verdict = verdictOf(entry, changed);
-        return verdict === null ? [] : [{ rule: entry.id, effect: verdict.effect }];
-      }),
-    ),
-  );
+  return statusChange(rulesFor(form, typeof askedOf === 'string' ? [askedOf] : askedOf), withRatios(facts));
 }

@@ -59,14 +59,17 @@ export function windowOf(
   if (live.length === 0 && effects.every((effect) => effect === 'in favour')) return null;
   const deciding = [...asked.filter((rule) => rule.effect !== 'in favour'), ...live];
 
-  let best: Interval | null = null;
-  let run: Interval | null = null;
+  const runs: Interval[] = [];
+  let wasOpen = false;
   for (const { value, from, to } of probes) {
     const open = deciding.every((rule) => leavesOpen(rule, { ...given, [fact]: value }));
-    run = !open ? null : run === null ? [from, to] : [run[0], to];
-    if (run !== null && (best === null || run[1] - run[0] > best[1] - best[0])) best = run;
+    if (open) runs.push(wasOpen ? [runs.pop()![0], to] : [from, to]);
+    wasOpen = open;
   }
-  return best;
+  return runs.reduce<Interval | null>(
+    (best, run) => (best === null || run[1] - run[0] > best[1] - best[0] ? run : best),
+    null,
+  );
 }
 
 /** The one window that must exist for every form; a missing one is a fault of the book. */

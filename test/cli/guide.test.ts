@@ -1,0 +1,31 @@
+import { spawnSync } from 'node:child_process';
+import { join } from 'node:path';
+import { describe, expect, it } from 'vitest';
+
+const root = join(import.meta.dirname, '..', '..');
+const run = (line: string) =>
+  spawnSync(process.execPath, ['--import', 'tsx', 'lib/cli/guide.ts', ...line.split(' ')], {
+    cwd: root,
+    encoding: 'utf8',
+  });
+
+describe('guide on the command line', () => {
+  it('prints seventeen forms as JSON and leaves with 0', () => {
+    const { status, stdout, stderr } = run('--span 120 --width 12 --length 400 --radius 1500');
+    expect(stderr).toBe('');
+    expect(status).toBe(0);
+    const answer = JSON.parse(stdout) as { span: number; forms: { form: string; depthM: object }[] };
+    expect(answer.span).toBe(120);
+    expect(answer.forms).toHaveLength(17);
+    expect(Object.keys(answer.forms[0]!.depthM)).toEqual(['support', 'midspan']);
+  });
+  it.each([
+    ['--span -3', /span: expected more than 0 m, received -3 m \(--span\)/],
+    ['--span 100 --length 50', /length: expected at least the span of 100 m, received 50 m \(--length\)/],
+  ])('%s leaves with 2 and says why on stderr', (line, message) => {
+    const { status, stdout, stderr } = run(line);
+    expect(status).toBe(2);
+    expect(stdout).toBe('');
+    expect(stderr).toMatch(message);
+  });
+});
