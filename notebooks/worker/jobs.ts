@@ -1,4 +1,8 @@
-import { appraiseSteps } from '../../lib/index.ts';
+import { appraiseSteps, sizer } from '../../lib/index.ts';
+import type { Study } from '../../lib/index.ts';
+
+/** Kept as long as the worker lives: the next study is nearly always the last one with one thing changed. */
+const memory = sizer();
 
 /** What the worker of the notebook does. */
-export const jobs = { appraise: appraiseSteps };
+export const jobs = { appraise: (study: Study) => appraiseSteps(study, memory) };
