@@ -1,7 +1,13 @@
 import type { BillPart, MeasuredLine } from '../../model/index.ts';
 
 /** One measured line of the take-off; see `MeasuredLine`. Quantities are not negative. */
-export function measured(part: BillPart, item: string, quantity: number, what: string, how: string): MeasuredLine {
+export function measured(
+  part: BillPart,
+  item: string,
+  quantity: number,
+  what: string,
+  how: string,
+): MeasuredLine {
   return { part, item, quantity: Math.max(0, quantity), what, how };
 }
 

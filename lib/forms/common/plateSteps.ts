@@ -25,15 +25,18 @@ export function plateSteps(
   const best = new Float64Array(n + 1).fill(Infinity);
   const from = new Int32Array(n + 1);
   best[0] = 0;
+  const weighted = mirroredWeights(lengthM);
   for (let end = 1; end <= n; end++) {
     let thickest = 0;
     let length = 0;
+    let weight = 0;
     for (let start = end - 1; start >= 0; start--) {
       thickest = Math.max(thickest, rolled[start]!);
       length += lengthM[start]!;
+      weight += weighted[start]!;
       // A run shorter than a plate is allowed only where the whole girder is.
       if (length < leastLengthM && !(start === 0 && end === n)) continue;
-      const cost = best[start]! + kgPerM3OfPlate * thickest * length + (start > 0 ? changeKg : 0);
+      const cost = best[start]! + kgPerM3OfPlate * thickest * weight + (start > 0 ? changeKg : 0);
       if (cost < best[end]!) {
         best[end] = cost;
         from[end] = start;
@@ -41,7 +44,7 @@ export function plateSteps(
     }
   }
   const steps = new Float64Array(n);
-  for (let end = n; end > 0; ) {
+  for (let end = n; end > 0;) {
     const start = from[end]!;
     let thickest = 0;
     for (let e = start; e < end; e++) thickest = Math.max(thickest, rolled[e]!);
@@ -49,4 +52,16 @@ export function plateSteps(
     end = start;
   }
   return steps;
+}
+
+/** Lengths with a trace more weight away from the middle: of two equal solutions the same one is found from either end. */
+function mirroredWeights(lengthM: ArrayLike<number>): Float64Array {
+  let total = 0;
+  for (let e = 0; e < lengthM.length; e++) total += lengthM[e]!;
+  let x = 0;
+  return Float64Array.from(lengthM, (length) => {
+    const away = Math.abs(x + length / 2 - total / 2) / total;
+    x += length;
+    return length * (1 + 1e-7 * away);
+  });
 }

@@ -76,7 +76,9 @@ export function designSlab(slab: SlabCase): SlabDesign {
 
   const mid = thicknessFor(least, step, (t) => demand(spanMoments(t), t, slab.standard, standard));
   const rootLeast = slab.overhangM > 0 ? Math.max(mid.thicknessM, edgeM) : mid.thicknessM;
-  const overhang = thicknessFor(rootLeast, step, (t) => demand(overhangMoments(t), t, slab.standard, standard));
+  const overhang = thicknessFor(rootLeast, step, (t) =>
+    demand(overhangMoments(t), t, slab.standard, standard),
+  );
   const inner = thicknessFor(rootLeast, step, (t) => demand(innerRootMoments(t), t, slab.standard, standard));
   const root = overhang.thicknessM >= inner.thicknessM ? overhang : inner;
   const rootM = root.thicknessM;
@@ -102,15 +104,26 @@ export function designSlab(slab: SlabCase): SlabDesign {
     spanMomentKNm: midBars.momentKNm,
     rootMomentKNm: rootBars.momentKNm,
     checks: [
-      check('slab-span', 'slab between its supports: bars within the practical ratio', midBars.ratio, d.steelRatioMost.value, '1'),
-      check('slab-root', 'slab over its supports: bars within the practical ratio', rootBars.ratio, d.steelRatioMost.value, '1'),
+      check(
+        'slab-span',
+        'slab between its supports: bars within the practical ratio',
+        midBars.ratio,
+        d.steelRatioMost.value,
+        '1',
+      ),
+      check(
+        'slab-root',
+        'slab over its supports: bars within the practical ratio',
+        rootBars.ratio,
+        d.steelRatioMost.value,
+        '1',
+      ),
     ],
   };
 }
 
 /** Middle of a barrier from the edge of the deck, m. */
 const edgeArmM = 0.25;
-const steelKgM3 = 7850;
 
 interface BarDemand {
   readonly momentKNm: number;
@@ -123,7 +136,9 @@ interface BarDemand {
 function demand(moments: Moments, thicknessM: number, id: StandardId, standard: LoadStandard): BarDemand {
   const { uls } = standard.factors;
   const ultimate =
-    uls.permanent * moments.permanent + uls.superimposed * moments.superimposed + uls.traffic * moments.traffic;
+    uls.permanent * moments.permanent +
+    uls.superimposed * moments.superimposed +
+    uls.traffic * moments.traffic;
   const service = moments.permanent + moments.superimposed + moments.traffic;
   const effective = thicknessM - slabData.barAxisM.value;
   const lever = slabData.leverRatio.value * effective;
@@ -134,7 +149,11 @@ function demand(moments: Moments, thicknessM: number, id: StandardId, standard: 
   return { momentKNm: ultimate, areaM2, ratio: areaM2 / effective };
 }
 
-function thicknessFor(least: number, step: number, need: (t: number) => BarDemand): { readonly thicknessM: number } {
+function thicknessFor(
+  least: number,
+  step: number,
+  need: (t: number) => BarDemand,
+): { readonly thicknessM: number } {
   const most = slabData.mostThicknessM.value;
   let t = Math.ceil(least / step - 1e-9) * step;
   while (t < most && need(t).ratio > slabData.steelRatioMost.value) t += step;

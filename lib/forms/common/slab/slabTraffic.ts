@@ -28,7 +28,10 @@ export function spanTraffic(slab: WheeledSlab, standard: LoadStandard): number {
   const span = slab.spacingM;
   const axles = heaviestAxles(standard);
   const uniform = uniformMoment(slab, standard);
-  return uniform + (slab.direction === 'across' ? acrossSpan(slab, standard, axles) : alongSpan(slab, standard, axles, span));
+  return (
+    uniform +
+    (slab.direction === 'across' ? acrossSpan(slab, standard, axles) : alongSpan(slab, standard, axles, span))
+  );
 }
 
 /** Wheels of lanes side by side on a slab that spans across the road; axles stand in a row along its supports. */
@@ -66,7 +69,13 @@ function alongSpan(slab: WheeledSlab, standard: LoadStandard, axles: HeavyAxles,
   const { wheelGaugeM } = standard.lanes;
   const gap = slabData.wheelGapM[slab.standard];
   const sides = { sideAlongM: patch.acrossM + spread, sideSpanM: patch.alongM + spread };
-  const own = stripInfluence(span, span / 2, { alongM: [0, wheelGaugeM], ...sides }, slabData.poisson.value, steps);
+  const own = stripInfluence(
+    span,
+    span / 2,
+    { alongM: [0, wheelGaugeM], ...sides },
+    slabData.poisson.value,
+    steps,
+  );
   const next = stripInfluence(
     span,
     span / 2,
@@ -74,7 +83,8 @@ function alongSpan(slab: WheeledSlab, standard: LoadStandard, axles: HeavyAxles,
     slabData.poisson.value,
     steps,
   );
-  const secondShare = slab.deck.carriagewayM >= 2 * standard.lanes.widthM ? (standard.lanes.vehicleShare[1] ?? 1) : 0;
+  const secondShare =
+    slab.deck.carriagewayM >= 2 * standard.lanes.widthM ? (standard.lanes.vehicleShare[1] ?? 1) : 0;
   let most = 0;
   for (let i = 0; i <= steps; i++) {
     let one = 0;

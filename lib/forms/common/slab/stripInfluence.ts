@@ -31,7 +31,8 @@ export function stripInfluence(
     const atSection = Math.sin(alpha * sectionM);
     if (Math.abs(atSection) < 1e-12) continue;
     let along = 0;
-    for (const c of row.alongM) along += reach(alpha, c + halfAlong, poisson) - reach(alpha, c - halfAlong, poisson);
+    for (const c of row.alongM)
+      along += reach(alpha, c + halfAlong, poisson) - reach(alpha, c - halfAlong, poisson);
     const spread = Math.sin(alpha * halfSpanSide) / (alpha * halfSpanSide);
     const amplitude = ((2 / spanM) * spread * along * atSection) / row.sideAlongM;
     for (let i = 1; i < steps; i++) influence[i]! += amplitude * Math.sin((n * Math.PI * i) / steps);

@@ -1,0 +1,33 @@
+import type { UnitTask } from '../../model/index.ts';
+import { compositeData } from './compositeData.ts';
+
+/** Where the girders of a deck stand. */
+export interface GirderLayout {
+  readonly count: number;
+  readonly twin: boolean;
+  readonly spacingM: number;
+  readonly overhangM: number;
+  /** From the middle of the deck, left to right, m. */
+  readonly offsetsM: readonly number[];
+}
+
+/**
+ * Girder lines of a deck: two with cross-girders up to `twin.mostWidthM`, more beyond; `task.girders` overrides.
+ * @throws RangeError when fewer than two girders or part of a girder are asked for.
+ */
+export function girderLayout(task: UnitTask): GirderLayout {
+  const { widthM } = task.deck;
+  const { twin, multi } = compositeData;
+  const asked = task.girders;
+  if (asked !== undefined && !(Number.isInteger(asked) && asked >= 2))
+    throw new RangeError(
+      `girders: expected a whole number, 2 or more, received ${asked}; leave it out for the usual count`,
+    );
+  const many = Math.max(3, Math.ceil(widthM / multi.mostSpacingM - 2 * multi.overhangOverSpacing - 1e-9) + 1);
+  const count = asked ?? (widthM <= twin.mostWidthM ? 2 : many);
+  const ratio = count === 2 ? twin.overhangOverSpacing : multi.overhangOverSpacing;
+  const spacingM = widthM / (count - 1 + 2 * ratio);
+  const overhangM = (widthM - (count - 1) * spacingM) / 2;
+  const offsetsM = Array.from({ length: count }, (_, i) => (i - (count - 1) / 2) * spacingM);
+  return { count, twin: count === 2, spacingM, overhangM, offsetsM };
+}

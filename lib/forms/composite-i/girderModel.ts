@@ -1,0 +1,316 @@
+import type { StandardId, UnitTask } from '../../model/index.ts';
+import {
+  concrete,
+  girderStiffnessM4,
+  loadStandard,
+  materials,
+  steelYield,
+  trafficOnGirder,
+  usualSteel,
+  type LoadStandard,
+  type TrafficLoad,
+} from '../../actions/index.ts';
+import { lineBeam, uniform } from '../../mechanics/index.ts';
+import { designSlab, type SlabDesign } from '../common/slab/designSlab.ts';
+import { supportPositions } from '../common/supports.ts';
+import { compositeData } from './compositeData.ts';
+import { girderLayout, type GirderLayout } from './girderLayout.ts';
+import { bareGirder, type GirderTop } from './girderSection.ts';
+
+/** Equal elements a span is divided into; plates are constant within one. */
+export const elementsPerSpan = 20;
+
+/** Everything about one girder that does not change while its plates are sought. */
+export interface GirderModel {
+  readonly task: UnitTask;
+  readonly standardId: StandardId;
+  readonly standard: LoadStandard;
+  readonly layout: GirderLayout;
+  readonly slab: SlabDesign;
+  readonly supportsM: readonly number[];
+  readonly lengthM: number;
+  /** Length of each element, m. */
+  readonly elementM: Float64Array;
+  /** Girder height over both flanges, m. */
+  readonly girderM: number;
+  /** Ratio of moduli for short loads. */
+  readonly modularRatio: number;
+  /** What acts above the steel girder, by element: short loads, lasting loads, slab cracked (bars only). */
+  readonly short: readonly GirderTop[];
+  readonly lasting: readonly GirderTop[];
+  readonly cracked: readonly GirderTop[];
+  /** 1 where the stiffness counts the slab as cracked. */
+  readonly isCracked: Uint8Array;
+  /** Where the girders are braced to one another, m from the first support, supports among them. */
+  readonly braceAtM: readonly number[];
+  /** Length of the bay that each element lies in, m. */
+  readonly bracingM: Float64Array;
+  /** First guess of the design moment, kNm at the stations, on a girder of constant stiffness. */
+  readonly guessKNm: Float64Array;
+  /** What curvature in plan adds to every load of the outer girder; 1 on a straight. */
+  readonly curve: number;
+  /** Wet slab, working load while casting and superimposed load on one girder, kN/m. */
+  readonly slabKNm: number;
+  readonly castingKNm: number;
+  readonly superimposedKNm: number;
+  readonly traffic: TrafficLoad;
+  /** Force in the slab when its shrinkage is prevented over the area that acts with a girder, kN, by element. */
+  readonly shrinkageKN: Float64Array;
+  /** Modulus of the steel, kN/m2. */
+  readonly modulusKNm2: number;
+  yieldMPa(thicknessM: number): number;
+}
+
+/**
+ * Lays out the girders, designs the slab across the deck and shares the loads out.
+ * @throws RangeError for an impossible girder count
+ */
+export function girderModel(task: UnitTask): GirderModel {
+  const standard = loadStandard(task.standard);
+  const layout = girderLayout(task);
+  const slab = designSlab({
+    standard: task.standard,
+    deck: task.deck,
+    direction: 'across',
+    spacingM: layout.spacingM,
+    overhangM: layout.overhangM,
+    continuous: !layout.twin,
+    uniform: !layout.twin,
+  });
+  const supportsM = supportPositions(task.spansM);
+  const elementM = Float64Array.from(
+    { length: task.spansM.length * elementsPerSpan },
+    (_, e) => task.spansM[Math.floor(e / elementsPerSpan)]! / elementsPerSpan,
+  );
+  const girderM = Math.max(compositeData.leastGirderM.value, task.depthM - slab.rootM);
+  const grade = usualSteel(task.standard);
+  const modulusMPa = materials.steel[grade].eMPa;
+  const modularRatio =
+    modulusMPa / concrete(task.standard, materials.concreteDefaultMPa[task.standard].slab).ecmMPa;
+  const tops = topsOf(task, layout, slab, girderM, modularRatio, modulusMPa);
+  const share = task.deck.widthM / layout.count;
+  const curve = curvatureFactor(task, layout);
+  const traffic = amplified(worstTraffic(task, layout, slab, girderM, modularRatio), curve);
+  const slabKNm = curve * standard.unitWeights.concreteKNm3 * slab.meanM * share;
+  const superimposedKNm = (curve * task.deck.superimposedKNm) / layout.count;
+  const yieldMPa = (thicknessM: number): number => steelYield(grade, thicknessM * 1000);
+  const guessKNm = guessMoments(task, standard, slabKNm, superimposedKNm, traffic);
+  const peakKNm = Math.abs(Math.min(0, ...guessKNm));
+  const flangeM = Math.sqrt(
+    (compositeData.flange.widthOverThickness * peakKNm) / (girderM * yieldMPa(0.05) * 1e3),
+  );
+  const braceAtM = bracesOf(task, supportsM, Math.max(compositeData.flange.leastWidthM, flangeM));
+  return {
+    task,
+    standardId: task.standard,
+    standard,
+    layout,
+    slab,
+    supportsM,
+    lengthM: supportsM[supportsM.length - 1]!,
+    elementM,
+    girderM,
+    modularRatio,
+    ...tops,
+    braceAtM,
+    bracingM: baysOf(elementM, braceAtM),
+    guessKNm,
+    slabKNm,
+    curve,
+    castingKNm: curve * compositeData.casting.constructionKNm2 * share,
+    superimposedKNm,
+    traffic,
+    modulusKNm2: modulusMPa * 1e3,
+    yieldMPa,
+  };
+}
+
+/** The girder that carries most; all girders are made like it. */
+function worstTraffic(
+  task: UnitTask,
+  layout: GirderLayout,
+  slab: SlabDesign,
+  girderM: number,
+  modularRatio: number,
+): TrafficLoad {
+  // On a symmetrical deck the left half tells all.
+  const lines =
+    task.deck.carriagewayOffsetM === 0
+      ? layout.offsetsM.slice(0, Math.ceil(layout.count / 2))
+      : layout.offsetsM;
+  // The stiffness enters the distribution factors to the power 0.1: plates of ordinary proportions will do.
+  const flangeM2 = 0.2 * girderM * 0.03;
+  const webM2 = (girderM * girderM) / compositeData.web.mostHeightOverThickness.value;
+  const inertiaM4 = (2 * flangeM2 * girderM ** 2) / 4 + (webM2 * girderM ** 2) / 12;
+  const armM = girderM / 2 + slab.rootM - slab.meanM / 2;
+  const options = {
+    spanM: Math.max(...task.spansM),
+    slabM: slab.meanM,
+    kgM4: girderStiffnessM4(modularRatio, inertiaM4, 2 * flangeM2 + webM2, armM),
+  };
+  const loads = lines.map((_, i) => trafficOnGirder(task.standard, task.deck, layout.offsetsM, i, options));
+  const heaviestKN = heaviestVehicleKN(loadStandard(task.standard));
+  const span = Math.max(...task.spansM);
+  const weigh = (load: TrafficLoad): number =>
+    (load.vehicleFactor * heaviestKN * 2) / span + load.udlKNm + load.footwayKNm;
+  return loads.reduce((worst, next) => (weigh(next) > weigh(worst) ? next : worst));
+}
+
+/**
+ * Curvature in plan turns bending into torque M/R, which parallel girders carry as a couple: loads of the outer girder
+ * grow by n Le2 / (pi2 C R D), with D between the outer girders and C for the girders between (V-load method, from
+ * memory). Le: whole simple span, 0.7 of a continuous one.
+ */
+function curvatureFactor(task: UnitTask, layout: GirderLayout): number {
+  if (!(task.planRadiusM < Infinity)) return 1;
+  const n = layout.count;
+  const effective = (task.spansM.length > 1 ? 0.7 : 1) * Math.max(...task.spansM);
+  const between = (n * (n + 1)) / (6 * (n - 1));
+  const outer = (n - 1) * layout.spacingM;
+  return 1 + (n * effective ** 2) / (Math.PI ** 2 * between * task.planRadiusM * outer);
+}
+
+function amplified(load: TrafficLoad, factor: number): TrafficLoad {
+  if (factor === 1) return load;
+  return {
+    ...load,
+    vehicleFactor: load.vehicleFactor * factor,
+    udlKNm: load.udlKNm * factor,
+    footwayKNm: load.footwayKNm * factor,
+  };
+}
+
+interface Tops {
+  readonly short: readonly GirderTop[];
+  readonly lasting: readonly GirderTop[];
+  readonly cracked: readonly GirderTop[];
+  readonly isCracked: Uint8Array;
+  readonly shrinkageKN: Float64Array;
+}
+
+function topsOf(
+  task: UnitTask,
+  layout: GirderLayout,
+  slab: SlabDesign,
+  girderM: number,
+  n0: number,
+  modulusMPa: number,
+): Tops {
+  const { spansM } = task;
+  const count = spansM.length * elementsPerSpan;
+  const short: GirderTop[] = [];
+  const lasting: GirderTop[] = [];
+  const cracked: GirderTop[] = [];
+  const isCracked = new Uint8Array(count);
+  const shrinkageKN = new Float64Array(count);
+  const tributaryM = task.deck.widthM / layout.count;
+  const thicknessM = slab.meanM;
+  // The soffit of the slab stands on the girder at the line; its mean thickness hangs from the level top.
+  const slabAxisM = girderM + slab.rootM - thicknessM / 2;
+  const n1 = n0 * compositeData.longTermRatio.value;
+  const last = spansM.length - 1;
+  let lastWidthM = NaN;
+  for (let e = 0; e < count; e++) {
+    const span = Math.floor(e / elementsPerSpan);
+    const along = ((e % elementsPerSpan) + 0.5) / elementsPerSpan;
+    const share = compositeData.crackedShare.value;
+    const atLeft = span > 0 && along < share;
+    const atRight = span < last && along > 1 - share;
+    isCracked[e] = atLeft || atRight ? 1 : 0;
+    const widthM = effectiveWidth(task, span, atLeft ? span : atRight ? span + 1 : -1, tributaryM);
+    const area = widthM * thicknessM;
+    const own = (area * thicknessM * thicknessM) / 12;
+    if (widthM === lastWidthM) {
+      short.push(short[e - 1]!);
+      lasting.push(lasting[e - 1]!);
+      cracked.push(cracked[e - 1]!);
+    } else {
+      const bars = compositeData.barsOverPiers[task.standard] * area;
+      const top = (n: number): GirderTop => ({
+        slabAreaM2: area / n,
+        slabInertiaM4: own / n,
+        slabAxisM,
+        barAreaM2: 0,
+        barAxisM: slabAxisM,
+      });
+      short.push(top(n0));
+      lasting.push(top(n1));
+      cracked.push({ ...bareGirder, slabAxisM, barAreaM2: bars, barAxisM: slabAxisM });
+    }
+    lastWidthM = widthM;
+    shrinkageKN[e] = isCracked[e] === 1 ? 0 : (compositeData.shrinkage.strain * modulusMPa * 1e3 * area) / n1;
+  }
+  return { short, lasting, cracked, isCracked, shrinkageKN };
+}
+
+/** Slab that acts with one girder, m: Le/8 on each side under the European standard, all of it in the other. */
+function effectiveWidth(task: UnitTask, span: number, support: number, tributaryM: number): number {
+  if (task.standard === 'hl93') return tributaryM;
+  const { spansM } = task;
+  const lag = compositeData.shearLag;
+  const last = spansM.length - 1;
+  const lengthM =
+    support >= 0
+      ? lag.atSupport * (spansM[support - 1]! + spansM[support]!)
+      : last === 0
+        ? spansM[span]!
+        : (span === 0 || span === last ? lag.endSpan : lag.innerSpan) * spansM[span]!;
+  return Math.min(tributaryM, (2 * lengthM) / lag.eachSide);
+}
+
+/** Design moments of the loads known so far, spread evenly, on a girder of constant stiffness. */
+function guessMoments(
+  task: UnitTask,
+  standard: LoadStandard,
+  slabKNm: number,
+  superimposedKNm: number,
+  traffic: TrafficLoad,
+): Float64Array {
+  const { uls } = standard.factors;
+  const span = Math.max(...task.spansM);
+  // A girder of ordinary slenderness weighs about a fifth of its slab; vehicles count as 2P/L.
+  const permanent = uls.permanent * 1.2 * slabKNm + uls.superimposed * superimposedKNm;
+  const vehicles = (2 * traffic.vehicleFactor * heaviestVehicleKN(standard)) / span;
+  const moving = uls.traffic * (traffic.udlKNm + traffic.footwayKNm + vehicles);
+  return uniform(lineBeam({ spansM: task.spansM, stationsPerSpan: elementsPerSpan }), permanent + moving)
+    .momentKNm;
+}
+
+function heaviestVehicleKN(standard: LoadStandard): number {
+  const weights = standard.vehicles.map((vehicle) =>
+    vehicle.axles.reduce((sum, axle) => sum + axle.loadKN, 0),
+  );
+  return Math.max(...weights) * (1 + standard.dynamicAllowance);
+}
+
+/** Equal bays in every span; bays that reach into the cracked region of an inner support are halved for slender flanges. */
+function bracesOf(task: UnitTask, supportsM: readonly number[], flangeM: number): number[] {
+  const { mostM, mostOverFlangeWidthAtPiers } = compositeData.bracing;
+  const share = compositeData.crackedShare.value;
+  const last = task.spansM.length - 1;
+  const braces = [0];
+  task.spansM.forEach((spanM, span) => {
+    const bays = Math.max(2, Math.ceil(spanM / mostM - 1e-9));
+    const bay = spanM / bays;
+    const start = supportsM[span]!;
+    for (let b = 0; b < bays; b++) {
+      const near =
+        (span > 0 && b * bay < share * spanM - 1e-9) ||
+        (span < last && (b + 1) * bay > (1 - share) * spanM + 1e-9);
+      if (near && bay > mostOverFlangeWidthAtPiers * flangeM) braces.push(start + (b + 0.5) * bay);
+      braces.push(b === bays - 1 ? supportsM[span + 1]! : start + (b + 1) * bay);
+    }
+  });
+  return braces;
+}
+
+function baysOf(elementM: Float64Array, braceAtM: readonly number[]): Float64Array {
+  let bay = 1;
+  let start = 0;
+  return elementM.map((lengthM) => {
+    const middle = start + lengthM / 2;
+    start += lengthM;
+    while (bay < braceAtM.length - 1 && braceAtM[bay]! < middle) bay++;
+    return braceAtM[bay]! - braceAtM[bay - 1]!;
+  });
+}

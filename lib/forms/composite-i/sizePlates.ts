@@ -1,0 +1,192 @@
+import { materials } from '../../actions/index.ts';
+import { webShearCapacity } from '../../mechanics/index.ts';
+import {
+  nextPlate,
+  plateThicknessesMm,
+  roundPlateUp,
+  roundWidthUp,
+  thickestPlateM,
+} from '../common/plates.ts';
+import { plateSteps } from '../common/plateSteps.ts';
+import { compositeData } from './compositeData.ts';
+import { elementChecks, leastFlangeM, noUse } from './elementChecks.ts';
+import type { GirderEffects } from './girderEffects.ts';
+import type { GirderModel } from './girderModel.ts';
+import type { GirderPlates } from './girderSection.ts';
+import type { PlateRun } from './plateRun.ts';
+import type { StageMoments } from './stageMoments.ts';
+
+/** Design shear on one girder, kN, by element: greatest over its ends and over the signs of traffic. */
+export function designShear(model: GirderModel, effects: GirderEffects): Float64Array {
+  const { uls } = model.standard.factors;
+  const { steelStage, superimposed, shrinkage, traffic } = effects;
+  return Float64Array.from(model.elementM, (_, e) => {
+    const right =
+      uls.permanent * steelStage.shearRightKN[e]! +
+      uls.superimposed * superimposed.shearRightKN[e]! +
+      shrinkage.shearRightKN[e]!;
+    const left =
+      uls.permanent * steelStage.shearLeftKN[e + 1]! +
+      uls.superimposed * superimposed.shearLeftKN[e + 1]! +
+      shrinkage.shearLeftKN[e + 1]!;
+    const q = uls.traffic;
+    return Math.max(
+      Math.abs(right + q * traffic.shearMaxKN[e]!),
+      Math.abs(right + q * traffic.shearMinKN[e]!),
+      Math.abs(left + q * traffic.shearMaxKN[e + 1]!),
+      Math.abs(left + q * traffic.shearMinKN[e + 1]!),
+    );
+  });
+}
+
+/** Distance of web stiffeners in an element, m: at the bracings, and once between them where the web is hard pressed. */
+export function webPanelM(model: GirderModel, e: number): number {
+  return model.bracingM[e]!;
+}
+
+/** Shear resistance of a web of one element, kN. */
+export function webCapacityKN(model: GirderModel, e: number, webM: number, heightM: number): number {
+  return webShearCapacity({
+    depthM: heightM,
+    thicknessM: webM,
+    fyMPa: model.yieldMPa(webM),
+    panelLengthM: webPanelM(model, e),
+    partialFactor: model.standard.resistance.steelBuckling,
+  });
+}
+
+/** Web thicknesses, m, by element: shear, slenderness and the practical minimum, in few steps. */
+export function sizeWeb(model: GirderModel, run: PlateRun, shearKN: Float64Array): Float64Array {
+  const { web, bendingShear } = compositeData;
+  const rolled = plateThicknessesMm.map((mm) => mm / 1000).filter((t) => t <= web.mostMm.value / 1000);
+  const need = Float64Array.from(shearKN, (v, e) => {
+    const height = model.girderM - run.topM[e]! - run.bottomM[e]!;
+    const least = Math.max(web.leastMm[model.standardId] / 1000, height / web.mostHeightOverThickness.value);
+    const fits = rolled.find(
+      (t) => t >= least - 1e-9 && v <= bendingShear.most * webCapacityKN(model, e, t, height),
+    );
+    return fits ?? web.mostMm.value / 1000;
+  });
+  return steps(model, need, model.girderM);
+}
+
+/** Flange widths from the areas that the most loaded sections need; constant along the girder. */
+export function flangeWidths(
+  model: GirderModel,
+  topAreaM2: number,
+  bottomAreaM2: number,
+): { readonly topM: number; readonly bottomM: number } {
+  const { flange } = compositeData;
+  const bay = Math.max(...model.bracingM);
+  const least = Math.max(
+    flange.leastWidthM,
+    flange.leastWidthOverGirder * model.girderM,
+    flange.leastWidthOverBracing * Math.min(bay * 4, compositeData.pieceLengthM.value),
+  );
+  const width = (area: number): number =>
+    Math.min(flange.mostWidthM, Math.max(least, Math.sqrt(flange.widthOverThickness * area)));
+  const bottomM = roundWidthUp(width(bottomAreaM2));
+  const topM = Math.min(
+    bottomM,
+    roundWidthUp(Math.max(least, Math.min(width(topAreaM2), flange.topOverBottomWidth * bottomM))),
+  );
+  return { topM, bottomM };
+}
+
+const use = noUse();
+
+/** Use the flanges are sized for: the last step of stiffness moves the moments by a per cent or two. */
+const aim = 0.98;
+
+/**
+ * Flange thicknesses that the moments ask for, by element, m, before they are stepped. Each flange is moved by the
+ * stress it lacks or has to spare (its area plus a sixth of the web is what a modulus is made of) a few times over.
+ */
+export function flangeNeeds(
+  model: GirderModel,
+  run: PlateRun,
+  moments: StageMoments,
+  equivalentKNm: Float64Array,
+  fatigueMPa: number,
+): { readonly top: Float64Array; readonly bottom: Float64Array } {
+  const elements = model.elementM.length;
+  const top = new Float64Array(elements);
+  const bottom = new Float64Array(elements);
+  const least = compositeData.flange.leastMm / 1000;
+  const most = thickestPlateM(model.standardId);
+  const plates = {
+    heightM: run.heightM,
+    topWidthM: run.topWidthM,
+    bottomWidthM: run.bottomWidthM,
+    topM: 0,
+    bottomM: 0,
+    webM: 0,
+  };
+  for (let e = 0; e < elements; e++) {
+    plates.topM = run.topM[e]!;
+    plates.bottomM = run.bottomM[e]!;
+    plates.webM = run.webM[e]!;
+    for (let round = 0; round < 5; round++) {
+      elementChecks(use, model, plates, e, moments, equivalentKNm, fatigueMPa);
+      const wantTop = Math.max(use.castTop, use.sagTop, use.hogTop, use.fatigueTop) / aim;
+      const wantBottom = Math.max(use.sagBottom, use.hogBottom, use.service, use.fatigueBottom) / aim;
+      const before = plates.topM + plates.bottomM;
+      plates.topM = moved(plates, plates.topM, plates.topWidthM, wantTop, least, most);
+      plates.bottomM = moved(plates, plates.bottomM, plates.bottomWidthM, wantBottom, least, most);
+      // Outstands of compressed flanges stay in class 3 at the stress they carry.
+      plates.topM = Math.max(
+        plates.topM,
+        leastFlangeM(plates.topWidthM, plates.webM, use.castTop * model.yieldMPa(plates.topM)),
+      );
+      if (use.hogBottom > 0)
+        plates.bottomM = Math.max(
+          plates.bottomM,
+          leastFlangeM(plates.bottomWidthM, plates.webM, use.hogBottom * model.yieldMPa(plates.bottomM)),
+        );
+      if (Math.abs(plates.topM + plates.bottomM - before) < 2e-4) break;
+    }
+    top[e] = Math.min(most, plates.topM);
+    bottom[e] = Math.min(most, plates.bottomM);
+  }
+  return { top, bottom };
+}
+
+function moved(
+  plates: GirderPlates,
+  thicknessM: number,
+  widthM: number,
+  want: number,
+  least: number,
+  most: number,
+): number {
+  const web = (plates.heightM - plates.topM - plates.bottomM) * plates.webM;
+  const next = thicknessM + (want - 1) * (thicknessM + web / (6 * widthM));
+  return Math.min(most, Math.max(least, next, thicknessM / 3));
+}
+
+/** Stepped flanges from the needs; `floor` keeps plates of an earlier round from growing thinner. */
+export function steppedFlange(
+  model: GirderModel,
+  needM: Float64Array,
+  widthM: number,
+  floor?: Float64Array,
+): Float64Array {
+  const need = floor ? needM.map((t, e) => Math.max(t, floor[e]!)) : needM;
+  return steps(model, need, widthM);
+}
+
+function steps(model: GirderModel, need: Float64Array, widthM: number): Float64Array {
+  return plateSteps(
+    need,
+    model.elementM,
+    widthM * materials.steelDensityKgM3,
+    compositeData.plateChangeKg.value,
+    compositeData.leastPlateLengthM.value,
+    roundPlateUp,
+  );
+}
+
+/** The next plate thickness up, within the thickest. */
+export function thicker(model: GirderModel, thicknessM: number): number {
+  return Math.min(thickestPlateM(model.standardId), nextPlate(thicknessM));
+}

@@ -1,0 +1,28 @@
+import type { FormId } from '../model/index.ts';
+import { compositeI } from './composite-i/index.ts';
+import type { FormModule } from './formModule.ts';
+import { truss } from './truss/index.ts';
+
+export type { FormModule, Pattern } from './formModule.ts';
+
+/** Every form the tool can size, by id. Adding a form is one line here beside its folder. */
+export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
+  'composite-i': compositeI,
+  truss,
+};
+
+/** Ids of the forms the tool can size, in the order in which they are listed everywhere. */
+export const sizeableForms: readonly FormId[] = Object.values(forms).map((form) => form.id);
+
+/**
+ * The module of a form.
+ * @throws RangeError for a form the tool knows by name but cannot size yet, or does not know
+ */
+export function formModule(id: FormId): FormModule {
+  const form = forms[id];
+  if (!form)
+    throw new RangeError(
+      `form: expected one of ${sizeableForms.join(', ')}, received ${id}; choose another form`,
+    );
+  return form;
+}
