@@ -4,7 +4,7 @@ import type { GroundFigures } from './data.ts';
 import { substructureData } from './data.ts';
 
 /** Most rows of piles along and across the road. */
-const mostAlong = 6;
+const mostAlong = 8;
 const mostAcross = 10;
 
 /** A capped group of bored piles. */
@@ -39,11 +39,28 @@ export function pileCapacity(ground: GroundFigures, diameterM: number, inStratum
 }
 
 /**
- * The group with the least concrete in piles and cap: diameters and rows are tried in turn; loads on the corner piles come
+ * The group with the least effort in piles and cap: diameters and rows are tried in turn, under a wall also how far the cap
+ * lies to the front; loads on the corner piles come
  * from V / n with the moments on the pile grid; the length in the bearing stratum is what the corner pile needs.
  * Null when no group carries the loads (the ground or the loads are outside the tool's range).
  */
 export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLevels): PileGroup | null {
+  const { backfill } = task;
+  if (backfill === null) return leastGroup(task, ground, levels)?.group ?? null;
+  const tried = substructureData.abutment.pileHeelShares.map((heelShare) =>
+    leastGroup({ ...task, backfill: { ...backfill, heelShare } }, ground, levels),
+  );
+  return (
+    tried.reduce((a, b) => (a === null || (b !== null && b.effort < a.effort) ? b : a), null)?.group ?? null
+  );
+}
+
+/** The group with the least effort: concrete of piles and cap, and a fixed amount for each pile, m3. */
+function leastGroup(
+  task: FootTask,
+  ground: GroundFigures,
+  levels: PileLevels,
+): { readonly group: PileGroup; readonly effort: number } | null {
   const { piles } = substructureData;
   let best: PileGroup | null = null;
   let least = Infinity;
@@ -77,7 +94,7 @@ export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLe
         const depthM = Math.max(piles.leastCapDepthM, piles.capDepthDiameters * diameterM);
         const capVolume = lengthM * widthM * depthM;
         const n = rowsAlong * rowsAcross;
-        if (capVolume + n * area * ground.socketDiameters * diameterM > least) break;
+        if (capVolume + n * (area * ground.socketDiameters * diameterM + piles.perPileM3) > least) break;
         if (wall && rowsAcross > 2 && widthM > task.shaftWidthM + 2 * diameterM) break;
         if (n * lateralKN < leastLateral || n * stress * area < leastVertical) continue;
         const undersideM = levels.capTopM - depthM;
@@ -96,9 +113,9 @@ export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLe
         const startM = Math.min(levels.bearingLevelM, levels.scouredLevelM, undersideM);
         const toeLevelM = startM - need;
         const pileLength = undersideM - toeLevelM;
-        const volume = capVolume + n * pileLength * area;
-        if (volume < least) {
-          least = volume;
+        const effort = capVolume + n * (pileLength * area + piles.perPileM3);
+        if (effort < least) {
+          least = effort;
           best = {
             rowsAlong,
             rowsAcross,
@@ -111,7 +128,7 @@ export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLe
       }
     }
   }
-  return best;
+  return best === null ? null : { group: best, effort: least };
 }
 
 interface Trial {

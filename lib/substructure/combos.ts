@@ -19,6 +19,8 @@ export interface Backfill {
   /** Level of the road over it, m. */
   readonly topLevelM: number;
   readonly widthM: number;
+  /** Share of the plan outside the stem that lies behind it, under the soil. */
+  readonly heelShare: number;
 }
 
 /** Loads of a combination brought down to one level: V, H and M in kN and kNm. */

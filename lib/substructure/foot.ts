@@ -63,9 +63,9 @@ export function demandAt(
     const cover = (plan - shaftPlan) * coverM * soilOver(task.waterLevelM, topM);
     return { ...loads, verticalKN: loads.verticalKN + own + cover };
   }
-  const { topLevelM, widthM: wallM } = task.backfill;
+  const { topLevelM, widthM: wallM, heelShare } = task.backfill;
   const outside = Math.max(0, lengthM - task.shaftLengthM);
-  const heel = abutment.heelShare * outside;
+  const heel = heelShare * outside;
   const toe = outside - heel;
   const soilHeight = Math.max(0, topLevelM - topM);
   const soil = heel * wallM * soilHeight * footing.soilKNm3;

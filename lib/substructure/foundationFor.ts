@@ -22,7 +22,7 @@ export function foundationFor(task: FoundationTask, odds: GroundOdds): Foundatio
   if (group === null) {
     const most = Math.max(...task.combos.map((combo) => combo.verticalKN));
     throw new RangeError(
-      `${task.name}: expected loads that a footing or a group of up to 60 bored piles carries on ${odds.ground}, received ${Math.round(most)} kN; shorten the spans next to it or move it`,
+      `${task.name}: expected loads that a footing or a group of bored piles carries on ${odds.ground}, received ${Math.round(most)} kN; shorten the spans next to it or move it`,
     );
   }
   const count = group.rowsAlong * group.rowsAcross;

@@ -52,7 +52,7 @@ export function standAbutment(site: Site, ask: SupportAsk): Support {
     groundLevelM: Math.min(setting.groundLevelM, footM + piles.capCoverM),
     waterLevelM: setting.waterLevelM,
     scourM: scourDepth(setting, 0),
-    backfill: { topLevelM: ask.roadLevelM, widthM: site.deck.widthM },
+    backfill: { topLevelM: ask.roadLevelM, widthM: site.deck.widthM, heelShare: abutment.heelShare },
     shaftFootM: footM,
     shaftAreaM2: walls.stemLengthM * site.deck.widthM,
     shaftBarsKgM3: abutment.barsKgM3,
