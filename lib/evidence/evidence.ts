@@ -1,0 +1,25 @@
+import cables from '../../data/evidence/cables.json';
+import loads from '../../data/evidence/loads.json';
+import mechanics from '../../data/evidence/mechanics.json';
+import sections from '../../data/evidence/sections.json';
+import { evidenceCases } from './cases/index.ts';
+import { evidenceFile, type EvidenceRow } from './evidenceRow.ts';
+import { runEvidence, type EvidenceLine } from './runEvidence.ts';
+
+/** Files of `data/evidence` by name; a new file is named here. */
+const files: Readonly<Record<string, unknown>> = { mechanics, loads, sections, cables };
+
+/** Names of the files read, with their ending. */
+export function evidenceFileNames(): string[] {
+  return Object.keys(files).map((name) => `${name}.json`);
+}
+
+/** All rows of `data/evidence`, checked. */
+export function evidenceRows(): EvidenceRow[] {
+  return Object.values(files).flatMap((file) => evidenceFile.parse(file).rows);
+}
+
+/** Every published value beside ours, worked out now. */
+export function evidence(): EvidenceLine[] {
+  return runEvidence(evidenceRows(), evidenceCases);
+}
