@@ -1,10 +1,10 @@
-import type { AppraisedOption, Option, Status } from '../model/index.ts';
+import type { AppraisedOption, Check, Option, Status, WorkedOption } from '../model/index.ts';
 import { priceOption, type Draws, type PricedOption, type RateDraws } from '../price/index.ts';
 import { rulingsFor, statusOf } from '../rules/index.ts';
 import { expectedLines } from '../substructure/index.ts';
 import { perM2, splitQuantities } from '../takeoff/index.ts';
 import { optionFacts } from './facts.ts';
-import { spareOf, workOption } from './workOption.ts';
+import { mainUnit, spareOf, workOption } from './workOption.ts';
 import type { Workbench } from './workbench.ts';
 
 /** An option worked out, priced and ruled on, with its cost in every draw. */
@@ -38,9 +38,7 @@ export function appraiseOption(
   const deckAreaM2 = site.lengthM * site.deck.widthM;
   const foundations = worked.supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
   const { superstructure, supports } = splitQuantities([...worked.lines, ...foundations]);
-  const limiting = worked.designs.reduce((most, design) =>
-    design.limitingCheck.utilisation > most.limitingCheck.utilisation ? design : most,
-  ).limitingCheck;
+  const governing = limitingOf(worked);
   return {
     option: {
       ...worked,
@@ -58,7 +56,7 @@ export function appraiseOption(
         withoutApproaches: priced.withoutApproachesP50 / deckAreaM2,
       },
       parts: priced.parts,
-      limitingCheck: { id: limiting.id, label: limiting.label, utilisation: limiting.utilisation },
+      limitingCheck: { id: governing.id, label: governing.label, utilisation: governing.utilisation },
     },
     totals: priced.totals,
   };
@@ -68,4 +66,12 @@ function shareWithin(totals: Float64Array, amount: number): number {
   let count = 0;
   for (const total of totals) if (total <= amount) count += 1;
   return count / totals.length;
+}
+
+/** The check that governs the main unit; one of an approach only where it fails. */
+function limitingOf(option: WorkedOption): Check {
+  const main = option.designs[option.units.indexOf(mainUnit(option.units))]!.limitingCheck;
+  return option.designs
+    .map((design) => design.limitingCheck)
+    .reduce((most, check) => (check.utilisation > Math.max(1, most.utilisation) ? check : most), main);
 }

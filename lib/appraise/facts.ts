@@ -33,19 +33,26 @@ function sideSpanRatio(unit: Unit, pylons: readonly number[]): number {
   return Math.min(before, after) / Math.max(before, after);
 }
 
-function falseworkFacts(site: Site, option: WorkedOption, main: Unit): Known {
+/** Whether falsework of the main unit would stand over a railway or in water. */
+function falseworkOver(site: Site, main: Unit): Known {
   const from = main.supportsM[0]!;
   const to = main.supportsM.at(-1)!;
   const crosses = (stretch: { fromM: number; toM: number }): boolean =>
     stretch.fromM < to && stretch.toM > from;
-  const soffit = (x: number): number =>
-    roadLevelAt(site, option.profile, x) - constructionDepth(site.deck, option.depthM.midspan);
-  const points = [...site.groundX.filter((x) => x > from && x < to), from, to];
   return {
     falseworkOverRailway: site.zones.some((zone) => zone.kind === 'railway' && crosses(zone)),
     falseworkOverWater: site.waters.some(crosses),
-    falseworkHeightM: Math.max(...points.map((x) => soffit(x) - groundAt(site, x))),
   };
+}
+
+/** Greatest height from ground to soffit under the main unit, m. */
+function falseworkHeightM(site: Site, option: WorkedOption, main: Unit): number {
+  const from = main.supportsM[0]!;
+  const to = main.supportsM.at(-1)!;
+  const soffit = (x: number): number =>
+    roadLevelAt(site, option.profile, x) - constructionDepth(site.deck, option.depthM.midspan);
+  const points = [...site.groundX.filter((x) => x > from && x < to), from, to];
+  return Math.max(...points.map((x) => soffit(x) - groundAt(site, x)));
 }
 
 /** What is known of where the supports stand. */
@@ -66,6 +73,7 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
     supportsBarred: all.filter(barred).length,
     // A study has one radius for the whole crossing.
     radiusConstant: site.planRadiusM === null ? 'unknown' : true,
+    ...(option.method === 'falsework' ? falseworkOver(site, main) : {}),
     ...(main.pylons ? { pylons: main.pylons.length, sideSpanRatio: sideSpanRatio(main, main.pylons) } : {}),
     ...(spans.length > 1 && !main.pylons ? { endSpanRatio: endSpanRatio(spans) } : {}),
   };
@@ -93,7 +101,7 @@ export function optionFacts(
   const clearances = obstacles.flatMap(({ clearance }) => (clearance ? [clearance] : []));
   const known: Known = {
     ...arrangementFacts(site, option),
-    ...(option.method === 'falsework' ? falseworkFacts(site, option, main) : { falseworkHeightM: 0 }),
+    falseworkHeightM: option.method === 'falsework' ? falseworkHeightM(site, option, main) : 0,
     haunched: design.depthM.support !== design.depthM.midspan,
     prestressed: quantitiesOf(design.lines).prestressKg > 0,
     supportDepthM: design.depthM.support,

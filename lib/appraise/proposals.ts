@@ -1,8 +1,10 @@
-import { arrange, type Relaxation } from '../arrange/index.ts';
+import { arrange } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { Arrangement, DroppedCount, FormId } from '../model/index.ts';
-import { requestFor } from './requestFor.ts';
+import type { Arrangement, DroppedCount, FormId, MethodId } from '../model/index.ts';
+import { rule, rulingsFor } from '../rules/index.ts';
+import { arrangementFacts } from './facts.ts';
 import { relaxationWords } from './relaxationWords.ts';
+import { requestFor } from './requestFor.ts';
 import type { Workbench } from './workbench.ts';
 
 /** Proposals of one form at most. */
@@ -16,30 +18,47 @@ export interface Proposals {
   readonly because: readonly string[];
 }
 
+/** Whether the rules warn of the method by which an arrangement is to be built. */
+function meetsTrouble(bench: Workbench, arrangement: Arrangement): boolean {
+  return rulingsFor('arrangement', arrangement.form, arrangementFacts(bench.site, arrangement)).some(
+    (ruling) =>
+      (ruling.effect === 'out' || ruling.effect === 'caution') && rule(ruling.rule).subject === 'erection',
+  );
+}
+
 /**
- * Searches a form by every method it may be built by. The cheapest of each method is proposed first, then the next best
- * of all, three at most; the rest is counted.
+ * Searches a form by its usual method, and by the next one where the rules warn of the first. The cheapest of each
+ * method is proposed first, then the next best of all, three at most; the rest is counted by reason.
  */
 export function proposalsFor(bench: Workbench, form: FormId): Proposals {
   const { site } = bench;
-  const counts: DroppedCount[] = [];
-  const relaxations: Relaxation[] = [];
-  const byMethod = formModule(form).methods.map((method) => {
-    const result = arrange(requestFor({ form, method }, site), site, bench.tables.tableFor({ form, method }));
-    counts.push(...result.dropped);
-    relaxations.push(...result.relaxations);
+  const counts = new Map<string, number>();
+  const count = (reason: string, more: number): void => {
+    if (more > 0) counts.set(reason, (counts.get(reason) ?? 0) + more);
+  };
+  const because: string[] = [];
+  const search = (method: MethodId): readonly Arrangement[] => {
+    const asked = { form, method };
+    const result = arrange(requestFor(asked, site), site, bench.tables.tableFor(asked));
+    for (const dropped of result.dropped) count(dropped.reason, dropped.count);
+    because.push(...result.relaxations.map(relaxationWords));
     return result.arrangements;
-  });
+  };
+
+  const byMethod: (readonly Arrangement[])[] = [];
+  for (const method of formModule(form).methods) {
+    const found = search(method);
+    byMethod.push(found);
+    if (found[0] && !meetsTrouble(bench, found[0])) break;
+  }
   const byCost = (a: Arrangement, b: Arrangement): number => a.tableCost - b.tableCost;
   const first = byMethod.flatMap((list) => list.slice(0, 1)).sort(byCost);
   const rest = byMethod.flatMap((list) => list.slice(1)).sort(byCost);
   const all = [...first, ...rest];
-  if (all.length > PER_FORM) {
-    counts.push({ form, reason: 'dearer than the proposals of its form', count: all.length - PER_FORM });
-  }
+  count('dearer than the proposals of its form', all.length - PER_FORM);
   return {
     arrangements: all.slice(0, PER_FORM),
-    counts,
-    because: all.length > 0 ? [] : [...new Set(relaxations.map(relaxationWords))],
+    counts: [...counts].map(([reason, n]) => ({ form, reason, count: n })),
+    because: all.length > 0 ? [] : [...new Set(because)],
   };
 }
