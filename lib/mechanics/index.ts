@@ -6,6 +6,7 @@ export {
   imposedCurvature,
   pointLoads,
   settle,
+  stepped,
   uniform,
   type PointLoad,
 } from './beam/loadings.ts';
