@@ -7,7 +7,8 @@ import { uniformStream } from './stream.ts';
 
 /**
  * One set of draws of a study, common to every option. Every array holds one value a draw and is never written again.
- * It depends on the seed, the number of draws, the ground odds and the forms; not on rates, quantities or options.
+ * It depends on the seed, the number of draws, the length and ground odds of the crossing and the forms; not on rates,
+ * quantities or options.
  */
 export interface Draws {
   readonly count: number;
@@ -18,17 +19,19 @@ export interface Draws {
   readonly own: ReadonlyMap<string, Float64Array>;
   /** For each ground stretch, the index of the class drawn. */
   readonly ground: readonly Uint8Array[];
+  /** Factor of the local error of the ground for each length of the crossing, from its start, median 1. */
+  readonly localGround: readonly Float64Array[];
   /** Factor of the private model error of each form, median 1: one draw shared by all options of the form. */
   readonly modelError: ReadonlyMap<FormId, Float64Array>;
 }
 
 /**
- * Draws the drivers once for a study. Each driver, item, stretch and form has its own stream, so that adding a form or an
- * item leaves every other draw as it was.
+ * Draws the drivers once for a study. Each driver, item, stretch, length of ground and form has its own stream, so that adding
+ * a form or an item leaves every other draw as it was.
  * Throws a RangeError on fewer than 100 draws, a seed that is no integer, or a form without a model error.
  */
 export function drawDrivers(
-  site: Pick<Site, 'groundStretches'>,
+  site: Pick<Site, 'groundStretches' | 'lengthM'>,
   books: Pick<Books, 'draws' | 'seed'>,
   forms: readonly FormId[],
 ): Draws {
@@ -48,8 +51,12 @@ export function drawDrivers(
       classes.map(({ odds }) => odds),
     ),
   );
+  const { everyM, sigma } = driverData.localGround;
+  const localGround = Array.from({ length: Math.floor(site.lengthM / everyM) + 1 }, (_, index) =>
+    factors(sigma, count, seed, `local ground ${index}`),
+  );
   const modelError = new Map(forms.map((form) => [form, modelErrors(form, count, seed)]));
-  return { count, seed, drivers, own, ground, modelError };
+  return { count, seed, drivers, own, ground, localGround, modelError };
 }
 
 function normals(count: number, seed: number, name: string): Float64Array {
@@ -81,7 +88,12 @@ function modelErrors(form: FormId, count: number, seed: number): Float64Array {
       `model error of ${form}: expected an entry in data/rates/drivers.json, received none; add one`,
     );
   }
-  const E = normals(count, seed, `form ${form}`);
-  for (let k = 0; k < count; k++) E[k] = Math.exp(found.sigma * E[k]!);
+  return factors(found.sigma, count, seed, `form ${form}`);
+}
+
+/** Lognormal factors of median 1. */
+function factors(sigma: number, count: number, seed: number, name: string): Float64Array {
+  const E = normals(count, seed, name);
+  for (let k = 0; k < count; k++) E[k] = Math.exp(sigma * E[k]!);
   return E;
 }

@@ -1,7 +1,8 @@
-import type { BillPart, FormId, MeasuredLine, Spread, WorkedOption } from '../model/index.ts';
+import type { BillPart, FormId, MeasuredLine, Spread, Support, WorkedOption } from '../model/index.ts';
 import { billParts } from '../model/index.ts';
 import type { Draws } from './drawDrivers.ts';
 import type { RateDraws } from './drawRates.ts';
+import { driverData } from './drivers.ts';
 import { quantileOf } from './quantile.ts';
 import { halfSigmas } from './rates.ts';
 
@@ -22,9 +23,10 @@ export type Priceable = Pick<WorkedOption, 'units' | 'lines' | 'supports' | 'mon
 
 /**
  * Prices one option on the draws of its study: quantities times drawn rates, lines of each unit times the model error of its
- * form, months by the productivity driver, and under every support the foundation of the ground class drawn for its stretch.
+ * form, months by the productivity driver, and under every support the foundation of the ground class drawn for its stretch,
+ * with the local error of the ground there.
  * Risk is carried by these draws alone; no contingency is added on top.
- * Throws a RangeError on a line without a rate, a form without draws, or a support whose foundations do not match its stretch.
+ * Throws a RangeError on a line without a rate, a form without draws, or a support off the crossing that was drawn.
  */
 export function priceOption(option: Priceable, draws: Draws, rates: RateDraws): PricedOption {
   const n = draws.count;
@@ -43,12 +45,25 @@ export function priceOption(option: Priceable, draws: Draws, rates: RateDraws): 
       else for (let k = 0; k < n; k++) P[k] = P[k]! + quantity * R[k]! * factor[k]!;
     }
   }
-  for (const block of foundationBlocks(option, draws)) {
-    const P = partOf(block.part);
-    const R = rateOf(rates, block.item);
-    const C = draws.ground[block.stretch]!;
-    const Q = block.byClass;
-    for (let k = 0; k < n; k++) P[k] = P[k]! + Q[C[k]!]! * R[k]!;
+  const first = option.supports[0]?.chainageM ?? 0;
+  const F = new Float64Array(n);
+  for (const support of option.supports) {
+    const C = draws.ground[support.stretch];
+    const L = draws.localGround[Math.floor((support.chainageM - first) / driverData.localGround.everyM)];
+    if (C === undefined || L === undefined) {
+      throw new RangeError(
+        `support at ${support.chainageM} m: expected a place on the crossing that was drawn, received stretch ${support.stretch}`,
+      );
+    }
+    for (const [part, items] of foundationItems(support)) {
+      F.fill(0);
+      for (const [item, byClass] of items) {
+        const R = rateOf(rates, item);
+        for (let k = 0; k < n; k++) F[k] = F[k]! + byClass[C[k]!]! * R[k]!;
+      }
+      const P = partOf(part);
+      for (let k = 0; k < n; k++) P[k] = P[k]! + F[k]! * L[k]!;
+    }
   }
   const totals = new Float64Array(n);
   for (const part of billParts) {
@@ -122,40 +137,19 @@ function factorOf(group: Group, option: Priceable, draws: Draws): Float64Array |
   return Z.map((z) => Math.exp((z < 0 ? low : high) * z));
 }
 
-/** Quantity of one item of the foundations on one stretch, for each class the stretch may turn out to be. */
-interface FoundationBlock {
-  readonly stretch: number;
-  readonly part: BillPart;
-  readonly item: string;
-  readonly byClass: Float64Array;
-}
-
-function foundationBlocks(option: Priceable, draws: Draws): FoundationBlock[] {
-  const blocks = new Map<string, FoundationBlock>();
-  for (const support of option.supports) {
-    if (draws.ground[support.stretch] === undefined) {
-      throw new RangeError(
-        `support at ${support.chainageM} m: expected a ground stretch of the draws, received ${support.stretch}`,
-      );
+/** Quantities of the foundations of a support by part and item, one for each class its ground may turn out to be. */
+function foundationItems(support: Support): Map<BillPart, Map<string, Float64Array>> {
+  const parts = new Map<BillPart, Map<string, Float64Array>>();
+  support.foundations.forEach((foundation, index) => {
+    for (const { part, item, quantity } of foundation.lines) {
+      let items = parts.get(part);
+      if (items === undefined) parts.set(part, (items = new Map<string, Float64Array>()));
+      let byClass = items.get(item);
+      if (byClass === undefined) items.set(item, (byClass = new Float64Array(support.foundations.length)));
+      byClass[index] = byClass[index]! + quantity;
     }
-    support.foundations.forEach((foundation, index) => {
-      for (const line of foundation.lines) {
-        const key = `${support.stretch} ${line.part} ${line.item}`;
-        let block = blocks.get(key);
-        if (block === undefined) {
-          const byClass = new Float64Array(support.foundations.length);
-          blocks.set(key, (block = { stretch: support.stretch, part: line.part, item: line.item, byClass }));
-        }
-        if (block.byClass.length !== support.foundations.length) {
-          throw new RangeError(
-            `support at ${support.chainageM} m: expected ${block.byClass.length} foundations as on the rest of its stretch, received ${support.foundations.length}`,
-          );
-        }
-        block.byClass[index] = block.byClass[index]! + line.quantity;
-      }
-    });
-  }
-  return [...blocks.values()];
+  });
+  return parts;
 }
 
 function rateOf(rates: RateDraws, item: string): Float64Array {

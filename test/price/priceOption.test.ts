@@ -77,8 +77,14 @@ it('priceOption(supports) takes under every support of a stretch the foundation 
   for (let k = 0; k < books.draws; k += 211) {
     const drawn = draws.ground[0]![k]!;
     const expected = supports
-      .flatMap((support) => support.foundations[drawn]!.lines)
-      .reduce((sum, line) => sum + line.quantity * rates.get(line.item)![k]!, 0);
+      .flatMap((support) =>
+        support.foundations[drawn]!.lines.map((line) => ({
+          ...line,
+          // One local error for every 10 m of the crossing.
+          local: draws.localGround[Math.floor(support.chainageM / 10)]![k]!,
+        })),
+      )
+      .reduce((sum, line) => sum + line.quantity * line.local * rates.get(line.item)![k]!, 0);
     expect(totals[k]! / expected).toBeCloseTo(1, 9);
   }
   const share = draws.ground[0]!.reduce((n, c) => n + (c === 0 ? 1 : 0), 0) / books.draws;

@@ -41,7 +41,7 @@ it('drivers: shares of variance of every item sum to 1 with its own', () => {
 
 it('drawRates(rates, draws) meets P10, P50, P90 and the mean of its rates within sampling error', () => {
   const rates = ratesFor({ ratePack: 'demo-2026', rates: [] });
-  const draws = drawDrivers({ groundStretches: [] }, { draws: 40_000, seed: 11 }, []);
+  const draws = drawDrivers({ groundStretches: [], lengthM: 10 }, { draws: 40_000, seed: 11 }, []);
   const drawn = drawRates(rates, draws);
   const mean = meanRates(rates);
   for (const rate of rates.rates) {

@@ -46,6 +46,7 @@ it('drawDrivers(seed) repeats, and a form more leaves every other draw as it was
     expect(again.drivers[id as keyof typeof again.drivers]).toEqual(Z);
   for (const [item, Z] of draws.own) expect(again.own.get(item)).toEqual(Z);
   expect(again.ground).toEqual(draws.ground);
+  expect(again.localGround).toEqual(draws.localGround);
   expect(again.modelError.get('composite-i')).toEqual(draws.modelError.get('composite-i'));
   const other = drawDrivers(crossing, { draws: 500, seed: 100 }, ['composite-i']);
   expect(other.drivers.market).not.toEqual(draws.drivers.market);
