@@ -1,5 +1,5 @@
 import type { AppraisedOption, Check, Option, Status, WorkedOption } from '../model/index.ts';
-import { priceOption, type Draws, type PricedOption, type RateDraws } from '../price/index.ts';
+import { optionError, priceOption, type Draws, type PricedOption, type RateDraws } from '../price/index.ts';
 import { rulingsFor, statusOf } from '../rules/index.ts';
 import { expectedLines } from '../substructure/index.ts';
 import { perM2, splitQuantities } from '../takeoff/index.ts';
@@ -27,7 +27,7 @@ export function appraiseOption(
 ): PricedAppraisal {
   const { study, site } = bench;
   const worked = workOption(bench, option);
-  const priced = priceOption(worked, draws, rates);
+  const priced = priceOption(worked, draws, rates, optionError(draws, option.number));
   const spare = spareOf(site, worked);
   const headroom = spare && { spareM: spare.spareM, reason: spare.limit.reason, chainageM: spare.chainageM };
   const { budget } = study.brief;

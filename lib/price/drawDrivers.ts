@@ -91,6 +91,21 @@ function modelErrors(form: FormId, count: number, seed: number): Float64Array {
   return factors(found.sigma, count, seed, `form ${form}`);
 }
 
+const optionErrors = new WeakMap<Draws, Map<number, Float64Array>>();
+
+/**
+ * Factor of the private error of one option, median 1, drawn from the number it keeps for life: what no driver shares and
+ * no other option has. Drawn once for each set of draws.
+ */
+export function optionError(draws: Draws, number: number): Float64Array {
+  const known = optionErrors.get(draws) ?? new Map<number, Float64Array>();
+  optionErrors.set(draws, known);
+  const found =
+    known.get(number) ?? factors(driverData.optionError.sigma, draws.count, draws.seed, `option ${number}`);
+  known.set(number, found);
+  return found;
+}
+
 /** Lognormal factors of median 1. */
 function factors(sigma: number, count: number, seed: number, name: string): Float64Array {
   const E = normals(count, seed, name);

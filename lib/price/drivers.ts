@@ -40,10 +40,11 @@ const schema = z.strictObject({
       'shares for every item of items.json',
     ),
   localGround: z.strictObject({ sigma: z.number().positive().max(1), everyM: z.number().positive(), reason }),
+  optionError: z.strictObject({ sigma: z.number().positive().max(1), reason }),
   modelError: z.array(z.strictObject({ form: z.enum(formIds), sigma: z.number().positive().max(1), reason })),
 });
 
-/** Drivers, shares of variance by item, model errors by form and local error of the ground, from `data/rates/drivers.json`. */
+/** Drivers, shares of variance by item, model errors by form, errors of one option and of the ground, from `data/rates/drivers.json`. */
 export const driverData = schema.parse(raw);
 
 /** How one item hangs on the drivers: factors on their standard normal draws and on its own; squares sum to 1. */

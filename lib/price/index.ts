@@ -1,4 +1,4 @@
-export { drawDrivers, type Draws } from './drawDrivers.ts';
+export { drawDrivers, optionError, type Draws } from './drawDrivers.ts';
 export { drawRates, type RateDraws } from './drawRates.ts';
 export { driverData, driverIds, type DriverId } from './drivers.ts';
 export { priceOption, type Priceable, type PricedOption } from './priceOption.ts';

@@ -25,10 +25,16 @@ export type Priceable = Pick<WorkedOption, 'units' | 'lines' | 'supports' | 'mon
  * Prices one option on the draws of its study: quantities times drawn rates, lines of each unit times the model error of its
  * form, months by the productivity driver, and under every support the foundation of the ground class drawn for its stretch,
  * with the local error of the ground there.
+ * `privateError` is a factor on everything in each draw, see `optionError`; null = none.
  * Risk is carried by these draws alone; no contingency is added on top.
  * Throws a RangeError on a line without a rate, a form without draws, or a support off the crossing that was drawn.
  */
-export function priceOption(option: Priceable, draws: Draws, rates: RateDraws): PricedOption {
+export function priceOption(
+  option: Priceable,
+  draws: Draws,
+  rates: RateDraws,
+  privateError: Float64Array | null = null,
+): PricedOption {
   const n = draws.count;
   const parts = new Map<BillPart, Float64Array>();
   const partOf = (part: BillPart): Float64Array => {
@@ -64,6 +70,9 @@ export function priceOption(option: Priceable, draws: Draws, rates: RateDraws): 
       const P = partOf(part);
       for (let k = 0; k < n; k++) P[k] = P[k]! + F[k]! * L[k]!;
     }
+  }
+  if (privateError !== null) {
+    for (const P of parts.values()) for (let k = 0; k < n; k++) P[k] = P[k]! * privateError[k]!;
   }
   const totals = new Float64Array(n);
   for (const part of billParts) {
