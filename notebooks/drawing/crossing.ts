@@ -1,20 +1,14 @@
-import { fixed, length, level } from '../format.ts';
+import { fixed, length } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
-import {
-  depthAt,
-  groundLevel,
-  placedUnits,
-  roadLevel,
-  slabLevel,
-  soffitLevel,
-  spansOf,
-  supportChainages,
-} from './alongOption.ts';
+import { roadLevel, soffitLevel, supportChainages } from './alongOption.ts';
 import { bubbleRadius, bubbles } from './bubbles.ts';
+import type { Envelope } from './clearances.ts';
 import { barredDimension, barredWash, clearances, envelopes } from './clearances.ts';
+import type { Room } from './crossingLetters.ts';
+import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
-import { dimensionChain, uprightDimension } from './dimension.ts';
+import { dimensionChain } from './dimension.ts';
 import { chainagesShown, crossingScale, elevationBody, levelRange, optionWords } from './elevation.ts';
 import type { Frame } from './frame.ts';
 import { frameOf } from './frame.ts';
@@ -22,8 +16,6 @@ import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
-import { levelMark, levelMarkBox } from './levelMark.ts';
-import type { Placer } from './placer.ts';
 import { placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
@@ -31,9 +23,7 @@ import type { Scale } from './scale.ts';
 import { pxPerMetre } from './scale.ts';
 import { scaleBar } from './scaleBar.ts';
 import { sheet } from './sheet.ts';
-import { strata, stratumOf } from './strata.ts';
-import { likeliest, toeLevel, toeSpread } from './substructure.ts';
-import { floodStretches, groundPoints } from './terrain.ts';
+import { strata } from './strata.ts';
 
 export interface CrossingInput {
   readonly site: Site;
@@ -52,257 +42,6 @@ export interface CrossingInput {
   readonly prefix?: string;
 }
 
-interface Room {
-  readonly frame: Frame;
-  readonly placer: Placer;
-  readonly accent: string;
-}
-
-/** Levels of water, flood and rail on shelves, each where there is most room along its own line. */
-function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefined, room: Room): Piece[] {
-  const { frame } = room;
-  const marks: { at: readonly number[]; levelM: number; words: string; water: boolean }[] = [];
-  for (const water of site.waters) {
-    const at = [0.2, 0.14, 0.25, 0.82, 0.76, 0.5].map(
-      (part) => water.fromM + part * (water.toM - water.fromM),
-    );
-    marks.push({
-      at: at.filter((x) => groundLevel(site, x) < water.levelM),
-      levelM: water.levelM,
-      words: level(water.levelM),
-      water: true,
-    });
-  }
-  for (const { levelM, fromM, toM } of floodStretches(site, frame)) {
-    marks.push({
-      at: [0.8, 0.7, 0.9, 0.2, 0.3, 0.1, 0.5].map((part) => fromM + part * (toM - fromM)),
-      levelM,
-      words: `${level(levelM)} flood`,
-      water: false,
-    });
-  }
-  for (const { kind, clearance } of obstacles ?? []) {
-    if (clearance === null || kind === 'river') continue;
-    marks.push({
-      at: [clearance.fromM - 3, clearance.fromM - 8, clearance.toM + 14],
-      levelM: clearance.datumLevelM,
-      words: `${level(clearance.datumLevelM)} ${kind === 'railway' ? 'rail' : kind}`,
-      water: false,
-    });
-  }
-  return marks.flatMap(({ at, levelM, words, water }) => {
-    const candidates = at
-      .filter((m) => m > frame.fromM && m < frame.toM)
-      .flatMap((m) => (['right', 'left'] as const).map((side) => ({ x: frame.x(m), side })));
-    const chosen =
-      candidates[
-        room.placer.choose(candidates.map(({ x, side }) => levelMarkBox(x, frame.y(levelM), words, side)))
-      ];
-    return chosen === undefined
-      ? []
-      : [levelMark(chosen.x, frame.y(levelM), words, { side: chosen.side, water })];
-  });
-}
-
-/** Depth at the deepest support and at the middle of the longest span. */
-function depthMarks(site: Site, option: AppraisedOption, room: Room): Piece[] {
-  const { frame } = room;
-  const chainages = supportChainages(option);
-  const spans = spansOf(option);
-  const longest = spans.indexOf(Math.max(...spans));
-  const middle = (chainages[longest] ?? 0) + (spans[longest] ?? 0) / 2;
-  const inner = chainages.slice(1, -1);
-  const deepest = inner.reduce(
-    (best, at) => (depthAt(option, at) > depthAt(option, best) + 0.01 ? at : best),
-    inner[0] ?? middle,
-  );
-  const places = depthAt(option, deepest) > depthAt(option, middle) + 0.02 ? [deepest, middle] : [middle];
-  return places.flatMap((at) => {
-    const depth = depthAt(option, at);
-    if (!Number.isFinite(depth) || at < frame.fromM + 2 || at > frame.toM - 2) return [];
-    const x = frame.x(at) + (at === deepest && places.length > 1 ? 14 : 0);
-    const here = frame.fromM + (x - frame.left) / frame.pxPerM;
-    const top = frame.y(slabLevel(site, option, here));
-    const bottom = frame.y(soffitLevel(site, option, here));
-    room.placer.take({ left: x, right: x + 34, top, bottom }, 2);
-    return [uprightDimension(x, top, bottom, level(depth))];
-  });
-}
-
-/** Lettering with a white edge, put down where it covers least. */
-function freeLabel(
-  room: Room,
-  places: readonly (readonly [x: number, y: number])[],
-  words: string,
-  style: {
-    readonly size?: number;
-    readonly italic?: boolean;
-    readonly fill?: string;
-    readonly letterSpacing?: number;
-    readonly anchor?: 'start' | 'middle' | 'end';
-  },
-  limit = 160,
-): Piece | null {
-  const size = style.size ?? letters.drawing;
-  const width = textWidth(words, size) + (style.letterSpacing ?? 0) * words.length;
-  const shift = style.anchor === 'middle' ? width / 2 : style.anchor === 'end' ? width : 0;
-  const boxes = places.map(([x, y]) => ({
-    left: x - shift,
-    right: x - shift + width,
-    top: y - size * 0.78,
-    bottom: y + size * 0.22,
-  }));
-  const chosen = places[room.placer.choose(boxes, limit)];
-  return chosen === undefined ? null : label(chosen[0], chosen[1], words, { ...style, halo: true });
-}
-
-/** Names of waters and ways in italics, as on maps. */
-function names(site: Site, room: Room): (Piece | null)[] {
-  const { frame } = room;
-  const river = site.waters.map((water) => {
-    const middle = (Math.max(water.fromM, frame.fromM) + Math.min(water.toM, frame.toM)) / 2;
-    if (water.toM < frame.fromM || water.fromM > frame.toM) return null;
-    const bed = Math.min(
-      ...site.groundZ.filter(
-        (_, i) => (site.groundX[i] ?? 0) >= water.fromM && (site.groundX[i] ?? 0) <= water.toM,
-      ),
-      groundLevel(site, middle),
-    );
-    const y = frame.y(bed);
-    return freeLabel(
-      room,
-      [22, 28, 34].map((down) => [frame.x(middle), y + down] as const),
-      water.name,
-      { size: letters.prose, italic: true, letterSpacing: 1.4, anchor: 'middle', fill: colours.second },
-      Infinity,
-    );
-  });
-  const ways = site.zones
-    .filter((zone) => zone.kind === 'railway' || zone.kind === 'road')
-    .map((zone) => {
-      const middle = (zone.fromM + zone.toM) / 2;
-      if (middle < frame.fromM || middle > frame.toM) return null;
-      const y = frame.y(groundLevel(site, middle));
-      const places = [16, 20, 28].flatMap((down) =>
-        [0, -24, 24, -48].map((shift) => [frame.x(middle) + shift, y + down] as const),
-      );
-      return freeLabel(
-        room,
-        places,
-        zone.name,
-        { italic: true, anchor: 'middle', fill: colours.second },
-        Infinity,
-      );
-    });
-  return [...river, ...ways];
-}
-
-/** Founding levels with their spread beside the piles, and the bearing stratum named on its own line. */
-function belowGround(
-  site: Site,
-  option: AppraisedOption | null,
-  room: Room,
-  lowestM: number,
-): (Piece | null)[] {
-  const { frame } = room;
-  const toes = (option?.supports ?? []).map((support) => {
-    const foundation = likeliest(support);
-    if (foundation === null || support.chainageM < frame.fromM || support.chainageM > frame.toM) return null;
-    const toe = toeLevel(foundation);
-    const spread = toeSpread(support);
-    const words = `${foundation.piles === null ? 'founded' : 'toe'} ${fixed(toe, 1)}${spread > 0.05 ? ` ± ${spread.toFixed(1)}` : ''}`;
-    const y = Math.min(frame.y(Math.max(toe, lowestM)), frame.y(lowestM)) - 2;
-    const right = frame.x(support.chainageM + foundation.footing.lengthM / 2) + 4;
-    const left =
-      frame.x(support.chainageM - foundation.footing.lengthM / 2) - 4 - textWidth(words, letters.drawing);
-    return freeLabel(
-      room,
-      [
-        [right, y],
-        [left, y],
-        [right, y - 12],
-        [left, y - 12],
-      ],
-      words,
-      { fill: colours.second },
-    );
-  });
-  const bearing = site.groundStretches.map((stretch) => {
-    const stratum = stratumOf(stretch);
-    if (stratum === null || stratum.likelyM < lowestM) return null;
-    const from = Math.max(stratum.fromM, frame.fromM);
-    const to = Math.min(stratum.toM, frame.toM);
-    const width = textWidth(stratum.words, letters.drawing) + 12;
-    if ((to - from) * frame.pxPerM < width + 20) return null;
-    const y = frame.y(stratum.likelyM);
-    const candidates = [0.85, 0.7, 0.55, 0.4, 0.25, 0.1].flatMap((part) => [
-      { x: frame.x(from) + part * ((to - from) * frame.pxPerM - width) },
-    ]);
-    const chosen =
-      candidates[
-        room.placer.choose(
-          candidates.map(({ x }) => levelMarkBox(x, y, stratum.words, 'right')),
-          900,
-        )
-      ];
-    return chosen === undefined ? null : levelMark(chosen.x, y, stratum.words, { colour: colours.second });
-  });
-  return [...toes, ...bearing];
-}
-
-/** Everything lettering must keep off: structure, ground, supports. */
-function takeRoom(site: Site, option: AppraisedOption | null, frame: Frame, room: Placer): void {
-  room.takeLine(groundPoints(site, frame), 2, 1.4);
-  if (option === null) return;
-  for (const { design, fromM } of placedUnits(option)) {
-    for (const shape of design.elevation) {
-      if (shape.faint === true) continue;
-      const points = shape.points.map(
-        ([x, z]) => [frame.x(fromM + x), frame.y(slabLevel(site, option, fromM + x) + z)] as const,
-      );
-      room.takeLine(points, 1.5, 1);
-    }
-    const { xM, depthM } = design.depthAlong;
-    for (let i = 1; i < xM.length; i += 1) {
-      const at = fromM + (xM[i] ?? 0);
-      room.take(
-        {
-          left: frame.x(fromM + (xM[i - 1] ?? 0)),
-          right: frame.x(at),
-          top: frame.y(roadLevel(site, option, at) + 1.1),
-          bottom: frame.y(slabLevel(site, option, at) - (depthM[i] ?? 0)),
-        },
-        2,
-      );
-    }
-  }
-  for (const support of option.supports) {
-    const foundation = likeliest(support);
-    const half = Math.max(support.shaft.lengthM, 1) / 2;
-    room.take(
-      {
-        left: frame.x(support.chainageM - half),
-        right: frame.x(support.chainageM + half),
-        top: frame.y(support.topLevelM),
-        bottom: frame.y(foundation?.footing.topLevelM ?? support.groundLevelM),
-      },
-      2,
-    );
-    if (foundation !== null) {
-      const wide = foundation.footing.lengthM / 2;
-      room.take(
-        {
-          left: frame.x(support.chainageM - wide),
-          right: frame.x(support.chainageM + wide),
-          top: frame.y(foundation.footing.topLevelM),
-          bottom: frame.y(toeLevel(foundation)),
-        },
-        1.2,
-      );
-    }
-  }
-}
-
 /** Gradient figures at both ends of the road. */
 function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
   const slope = (option.profile.endLevelM - option.profile.startLevelM) / site.lengthM;
@@ -311,6 +50,39 @@ function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
     fill: colours.second,
     halo: true,
   });
+}
+
+/** The barred dimension between envelope and soffit where there is room for its figure, else under the bed. */
+function barredPiece(
+  site: Site,
+  option: AppraisedOption | null,
+  list: readonly Envelope[],
+  room: Room,
+): Piece | null {
+  const { frame } = room;
+  const opening = site.mainOpening;
+  if (opening === null) return null;
+  const least = Math.max(
+    ...list.filter((one) => one.toM > opening.fromM && one.fromM < opening.toM).map((one) => one.topLevelM),
+    ...site.waters.map((water) => water.floodLevelM ?? water.levelM),
+  );
+  const over =
+    option === null
+      ? 6
+      : Math.min(
+          ...[0, 0.25, 0.5, 0.75, 1].map(
+            (part) => soffitLevel(site, option, opening.fromM + part * (opening.toM - opening.fromM)) - least,
+          ),
+        );
+  const y =
+    Number.isFinite(least) && over * frame.pxPerM >= 14
+      ? frame.y(least + Math.min(over / 2, 10 / frame.pxPerM))
+      : frame.y(Math.min(...site.groundZ)) + 14;
+  room.placer.take(
+    { left: frame.x(opening.fromM), right: frame.x(opening.toM), top: y - 6, bottom: y + 6 },
+    2,
+  );
+  return barredDimension(site, frame, y, room.accent);
 }
 
 /**
@@ -347,38 +119,7 @@ export function crossing(input: CrossingInput): Piece {
   const list = envelopes(site, input.obstacles).filter(
     (one) => one.toM > shown.fromM && one.fromM < shown.toM,
   );
-  const opening = site.mainOpening;
-  const barredLevel =
-    opening === null
-      ? NaN
-      : Math.max(
-          ...list
-            .filter((one) => one.toM > opening.fromM && one.fromM < opening.toM)
-            .map((one) => one.topLevelM),
-          ...site.waters.map((water) => water.floodLevelM ?? water.levelM),
-        );
-  // Between envelope and soffit where there is room for its figure, else under the bed.
-  const overOpening =
-    option === null || opening === null
-      ? Infinity
-      : Math.min(
-          ...[0, 0.25, 0.5, 0.75, 1].map(
-            (part) =>
-              soffitLevel(site, option, opening.fromM + part * (opening.toM - opening.fromM)) - barredLevel,
-          ),
-        );
-  const barredY = !Number.isFinite(barredLevel)
-    ? NaN
-    : overOpening * frame.pxPerM >= 17
-      ? frame.y(barredLevel) - 9.5
-      : frame.y(Math.min(...site.groundZ)) + 14;
-  const barred =
-    !small && Number.isFinite(barredY) ? barredDimension(site, frame, barredY, ink.accent) : null;
-  if (barred !== null && opening !== null)
-    room.placer.take(
-      { left: frame.x(opening.fromM), right: frame.x(opening.toM), top: barredY - 6, bottom: barredY + 6 },
-      2,
-    );
+  const barred = small ? null : barredPiece(site, option, list, room);
   const marked = small ? null : clearances(frame, list, ink.accent, room.placer);
   const depths = option === null || small ? [] : depthMarks(site, option, room);
   const levels = small ? [] : levelMarks(site, input.obstacles, room);

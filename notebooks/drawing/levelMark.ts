@@ -20,8 +20,8 @@ const height = 7.4;
 export function levelMarkBox(x: number, y: number, text: string, side: 'left' | 'right'): Box {
   const width = textWidth(text, letters.drawing) + 6;
   return side === 'right'
-    ? { left: x - half, right: x + width + half, top: y - height - 12, bottom: y }
-    : { left: x - width - half, right: x + half, top: y - height - 12, bottom: y };
+    ? { left: x - half, right: x + width + half, top: y - height - 11, bottom: y }
+    : { left: x - width - half, right: x + half, top: y - height - 11, bottom: y };
 }
 
 /** Open triangle standing on a level, its figure on a shelf. */

@@ -1,0 +1,219 @@
+import { currencySign, listed, money2, moneyUnit, odds, significant } from '../format.ts';
+import { linearAxis, spreadValues } from '../drawing/axis.ts';
+import { colours, letters, pens } from '../drawing/ink.ts';
+import { interval } from '../drawing/interval.ts';
+import { label } from '../drawing/label.ts';
+import { textWidth, wrapText } from '../drawing/lettering.ts';
+import { optionTitle } from '../drawing/optionWords.ts';
+import type { Piece } from '../drawing/piece.ts';
+import { el, g, num } from '../drawing/piece.ts';
+import { sheet } from '../drawing/sheet.ts';
+import { formInk } from '../forms/formInk.ts';
+import { formLooks } from '../forms/formLook.ts';
+import type { AppraisedOption, Standing } from '../model.ts';
+import { gridUprights, limitLine } from './marks.ts';
+import type { OptionsInput } from './rowHead.ts';
+import { rowHead } from './rowHead.ts';
+import type { Table } from './table.ts';
+
+export interface CostIntervalsInput extends OptionsInput {
+  readonly standing: Standing;
+  readonly budget: number | null;
+  readonly currency: string;
+  /** E.g. '2026 Q1'. */
+  readonly priceDate?: string;
+}
+
+/** Odds inside a group in words: of two options which is cheaper, of more the range either way. */
+export function groupOdds(group: readonly number[], standing: Standing): string {
+  const pairs = group.flatMap((a, index) => group.slice(index + 1).map((b) => standing.odds[a]?.[b] ?? NaN));
+  const [a = 0] = group;
+  if (pairs.length === 1) return `${odds(pairs[0] ?? NaN)} % that ${String(a)} is cheaper`;
+  const known = pairs.filter(Number.isFinite).map((share) => Math.max(share, 1 - share));
+  if (known.length === 0) return '';
+  const low = odds(Math.min(...known));
+  const high = odds(Math.max(...known));
+  return low === high ? `${low} % either way` : `${low} to ${high} %, either way round`;
+}
+
+/** Brackets at the right of runs that cannot be separated; runs that overlap stand side by side. */
+function brackets(
+  rows: readonly AppraisedOption[],
+  standing: Standing,
+  x: number,
+  yOf: (index: number) => number,
+  pitch: number,
+  room: number,
+): Piece[] {
+  const at = new Map(rows.map((option, index) => [option.number, index]));
+  const runs = standing.groups
+    .map((group) => group.filter((number) => at.has(number)))
+    .filter((group) => group.length > 1)
+    .map((group) => {
+      const places = group.map((number) => at.get(number) ?? 0);
+      return { group, from: Math.min(...places), to: Math.max(...places) };
+    });
+  const lanes: number[] = [];
+  return runs.map(({ group, from, to }) => {
+    let lane = lanes.findIndex((end) => end < from);
+    if (lane < 0) lane = lanes.length;
+    lanes[lane] = to;
+    const left = x + lane * 9;
+    const top = yOf(from) - pitch * 0.32;
+    const bottom = yOf(to) + pitch * 0.32;
+    const odd = runs.length > 1 && lanes.length > 1 && lane > 0;
+    const wordsX = left + 8 + (odd ? 0 : 0);
+    const lines = wrapText(groupOdds(group, standing), room - (wordsX - x), letters.drawing);
+    const firstY = (top + bottom) / 2 - (lines.length * 14) / 2 + 3;
+    return g(
+      {},
+      el('path', {
+        d: `M${num(left - 5)},${num(top)}h5V${num(bottom)}h-5`,
+        fill: 'none',
+        stroke: colours.ink,
+        'stroke-width': pens.medium,
+      }),
+      label(wordsX, firstY, 'cannot be separated', { weight: 600, halo: true }),
+      lines.map((text, index) =>
+        label(wordsX, firstY + (index + 1) * 14, text, { fill: colours.second, halo: true }),
+      ),
+    );
+  });
+}
+
+/** P10, P50 and P90 of each option against the budget; what cannot be separated is bracketed together. */
+export function costIntervals(input: CostIntervalsInput): Piece {
+  const { options, standing, budget, widthPx } = input;
+  const ink = formInk(
+    input.paper ?? 'colour',
+    options.map((option) => option.form),
+    input.prefix ?? 'intervals',
+  );
+  const narrow = widthPx < 680;
+  const unit = moneyUnit(input.currency, Math.max(0, ...options.map((option) => option.cost.p90)));
+  const pitch = narrow ? 40 : 42;
+  const head = 44;
+  const left = narrow ? 74 : 320;
+  const bracketRoom = narrow ? 92 : 148;
+  const columns = narrow ? 0 : 138;
+  const right = widthPx - bracketRoom - columns - (narrow ? 16 : 30);
+  const axis = linearAxis(
+    spreadValues(
+      options.map((option) => option.cost),
+      budget === null ? [] : [budget],
+    ),
+    left,
+    right,
+    narrow ? 4 : 7,
+  );
+  const yOf = (index: number): number => head + 20 + index * pitch;
+  const bottom = yOf(options.length - 1) + 20;
+  const priceX = right + 72;
+  const withinX = priceX + 78;
+  const figure = { size: letters.table } as const;
+  return sheet(widthPx, bottom + 8, 'Cost of each option, 10, 50 and 90 per cent, against the budget', [
+    ink.defs.length > 0 && el('defs', {}, ink.defs),
+    gridUprights(axis.ticks.map(axis.x), head - 6, bottom),
+    axis.ticks.map((tick) =>
+      label(axis.x(tick), head - 12, String(tick / unit.per), { anchor: 'middle', fill: colours.second }),
+    ),
+    label(
+      narrow ? 0 : left - 24,
+      head - 12,
+      `${unit.label}${input.priceDate === undefined || narrow ? '' : `, ${input.priceDate}`}`,
+      { anchor: narrow ? 'start' : 'end', fill: colours.second },
+    ),
+    !narrow &&
+      label(priceX, head - 12, `${currencySign(input.currency)}/m²`, { anchor: 'end', fill: colours.second }),
+    !narrow &&
+      budget !== null &&
+      label(withinX, head - 12, 'within budget', { anchor: 'end', fill: colours.second }),
+    budget !== null &&
+      limitLine(
+        axis.x(budget),
+        4,
+        bottom,
+        `budget ${significant(budget / unit.per, 3)}`,
+        ink.accent,
+        right + (narrow ? 80 : 140),
+      ),
+    options.map((option, index) => {
+      const y = yOf(index);
+      const { p10, p50, p90 } = option.cost;
+      const within = standing.within[option.number];
+      const leads = standing.leader === option.number;
+      return g(
+        { class: 'option' },
+        rowHead(
+          option,
+          y,
+          ink,
+          input.reference,
+          narrow ? undefined : optionTitle(option).split(', ').slice(0, 2).join(', '),
+        ),
+        label(axis.x(p10) - 5, y + 4, money2(p10 / unit.per), {
+          anchor: 'end',
+          fill: colours.second,
+          halo: true,
+        }),
+        label(axis.x(p90) + 5, y + 4, money2(p90 / unit.per), { fill: colours.second, halo: true }),
+        interval(option, axis.x, y, ink, 9),
+        label(axis.x(p50), y - 10, money2(p50 / unit.per), {
+          ...figure,
+          anchor: 'middle',
+          weight: 600,
+          halo: true,
+        }),
+        !narrow &&
+          label(priceX, y + 4.5, significant(option.pricePerM2.withApproaches, 2), {
+            ...figure,
+            anchor: 'end',
+          }),
+        !narrow &&
+          within !== undefined &&
+          label(withinX, y + 4.5, `${odds(within)} %`, {
+            ...figure,
+            anchor: 'end',
+            weight: leads ? 600 : 400,
+          }),
+      );
+    }),
+    brackets(options, standing, narrow ? right + 18 : withinX + 18, yOf, pitch, bracketRoom - 4),
+  ]);
+}
+
+/** The table behind the cost intervals. */
+export function costTable(input: CostIntervalsInput): Table {
+  const unit = moneyUnit(input.currency, Math.max(0, ...input.options.map((option) => option.cost.p90)));
+  return {
+    caption: `Cost, ${unit.label}`,
+    head: [
+      'option',
+      'form',
+      'P10',
+      'P50',
+      'P90',
+      `${currencySign(input.currency)}/m²`,
+      'within budget, %',
+      'cannot be separated from',
+    ],
+    rows: input.options.map((option) => {
+      const group = input.standing.groups.filter((one) => one.includes(option.number)).flat();
+      const others = [...new Set(group)].filter((number) => number !== option.number).map(String);
+      const within = input.standing.within[option.number];
+      return [
+        String(option.number),
+        formLooks[option.form].name,
+        money2(option.cost.p10 / unit.per),
+        money2(option.cost.p50 / unit.per),
+        money2(option.cost.p90 / unit.per),
+        significant(option.pricePerM2.withApproaches, 2),
+        within === undefined ? '' : odds(within),
+        listed(others),
+      ];
+    }),
+  };
+}
+
+/** Width of the words beside a bracket, px. */
+export const bracketWords = textWidth('cannot be separated', letters.drawing, 600);

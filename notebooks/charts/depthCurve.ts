@@ -1,0 +1,194 @@
+import { curveMonotoneX, line as lineOf } from 'd3-shape';
+import { level, moneyUnit, significant } from '../format.ts';
+import { linearAxis } from '../drawing/axis.ts';
+import type { Paper } from '../drawing/ink.ts';
+import { colours, letters, pens } from '../drawing/ink.ts';
+import { label } from '../drawing/label.ts';
+import { textWidth } from '../drawing/lettering.ts';
+import type { Piece } from '../drawing/piece.ts';
+import { el, g, num } from '../drawing/piece.ts';
+import { sheet } from '../drawing/sheet.ts';
+import { formInk } from '../forms/formInk.ts';
+import type { FormId } from '../model.ts';
+import type { Table } from './table.ts';
+
+export interface DepthCurveInput {
+  readonly form: FormId;
+  /** Cost of the whole crossing at each depth at midspan that was worked out, rising. */
+  readonly points: readonly { readonly depthM: number; readonly cost: number }[];
+  /** Depth the option has now, m. */
+  readonly depthM: number;
+  /** Depths at which something ends: a check is full, the road begins to rise. */
+  readonly limits: readonly { readonly depthM: number; readonly words: string }[];
+  readonly currency: string;
+  readonly widthPx: number;
+  readonly paper?: Paper;
+  readonly prefix?: string;
+}
+
+/** Stretch of depths about the least cost over which cost stays within a share of it, m; null without points. */
+export function flatStretch(
+  points: DepthCurveInput['points'],
+  share = 0.01,
+): readonly [number, number] | null {
+  if (points.length === 0) return null;
+  const least = points.reduce((best, one) => (one.cost < best.cost ? one : best));
+  const most = least.cost * (1 + share);
+  const at = points.indexOf(least);
+  const cross = (
+    inside: { depthM: number; cost: number },
+    outside: { depthM: number; cost: number } | undefined,
+  ): number =>
+    outside === undefined
+      ? inside.depthM
+      : inside.depthM +
+        ((outside.depthM - inside.depthM) * (most - inside.cost)) / (outside.cost - inside.cost);
+  let low = at;
+  while (low > 0 && (points[low - 1]?.cost ?? Infinity) <= most) low -= 1;
+  let high = at;
+  while (high < points.length - 1 && (points[high + 1]?.cost ?? Infinity) <= most) high += 1;
+  const first = points[low] ?? least;
+  const last = points[high] ?? least;
+  return [cross(first, points[low - 1]), cross(last, points[high + 1])];
+}
+
+/** Cost of the crossing against depth, with the stretch within 1 % of the least washed and the limits named. */
+export function depthCurve(input: DepthCurveInput): Piece {
+  const { form, points, widthPx } = input;
+  const ink = formInk(input.paper ?? 'colour', [form], input.prefix ?? 'depth');
+  const unit = moneyUnit(input.currency, Math.max(0, ...points.map((point) => point.cost)));
+  const left = 40;
+  const right = widthPx - 96;
+  const top = 40;
+  const bottom = top + 190;
+  const axis = linearAxis(
+    [...points.map((point) => point.depthM), ...input.limits.map((limit) => limit.depthM)],
+    left,
+    right,
+    6,
+  );
+  const money = linearAxis(
+    points.map((point) => point.cost),
+    bottom - 40,
+    top + 4,
+    5,
+  );
+  const path = lineOf<{ depthM: number; cost: number }>(
+    (point) => axis.x(point.depthM),
+    (point) => money.x(point.cost),
+  )
+    .curve(curveMonotoneX)
+    .digits(2);
+  const flat = flatStretch(points);
+  const now =
+    points.length === 0
+      ? NaN
+      : points.reduce((best, one) =>
+          Math.abs(one.depthM - input.depthM) < Math.abs(best.depthM - input.depthM) ? one : best,
+        ).cost;
+  const last = points[points.length - 1];
+  return sheet(widthPx, bottom + 34, 'Cost of the whole crossing against depth at midspan', [
+    flat !== null &&
+      g(
+        {},
+        el('rect', {
+          x: axis.x(flat[0]),
+          y: top,
+          width: axis.x(flat[1]) - axis.x(flat[0]),
+          height: bottom - top,
+          fill: colours.wash,
+        }),
+        el('path', {
+          d: `M${num(axis.x(flat[0]))},${num(bottom - 8)}v5H${num(axis.x(flat[1]))}v-5`,
+          fill: 'none',
+          stroke: colours.ink,
+          'stroke-width': pens.medium,
+        }),
+        label(
+          (axis.x(flat[0]) + axis.x(flat[1])) / 2,
+          bottom - 12,
+          `within 1 %: ${flat[0].toFixed(1)} to ${flat[1].toFixed(1)} m`,
+          { anchor: 'middle', weight: 600, halo: true },
+        ),
+      ),
+    el('path', {
+      d: money.ticks.map((tick) => `M${num(left)},${num(money.x(tick))}H${num(right)}`).join(''),
+      stroke: colours.grid,
+      'stroke-width': pens.fine,
+    }),
+    money.ticks.map((tick) =>
+      label(left - 8, money.x(tick) + 4, String(Number((tick / unit.per).toPrecision(4))), {
+        anchor: 'end',
+        fill: colours.second,
+      }),
+    ),
+    label(0, top - 22, `${unit.label} for the crossing`, { fill: colours.second }),
+    el('path', {
+      d: `M${num(left)},${num(bottom)}H${num(right)}${axis.ticks.map((tick) => `M${num(axis.x(tick))},${num(bottom)}v4`).join('')}`,
+      stroke: colours.ink,
+      'stroke-width': pens.thin,
+    }),
+    axis.ticks.map((tick) =>
+      label(axis.x(tick), bottom + 17, tick.toFixed(1), { anchor: 'middle', fill: colours.second }),
+    ),
+    label(widthPx, bottom + 17, 'depth at midspan, m', { anchor: 'end', fill: colours.second, halo: true }),
+    el('path', {
+      d: path(points) ?? '',
+      fill: 'none',
+      stroke: ink.line(form),
+      'stroke-width': pens.thick,
+      'stroke-linejoin': 'round',
+    }),
+    last !== undefined &&
+      label(axis.x(last.depthM) + 6, money.x(last.cost) + 4, 'whole crossing', {
+        size: letters.table,
+        weight: 600,
+      }),
+    input.limits.map((limit, index) => {
+      const words = `${level(limit.depthM)}: ${limit.words}`;
+      const x = axis.x(limit.depthM);
+      const turned = x + 6 + textWidth(words, letters.drawing) > widthPx;
+      return g(
+        {},
+        el('path', {
+          d: `M${num(x)},${num(top - 8)}V${num(bottom)}`,
+          stroke: ink.accent,
+          'stroke-width': pens.heavy,
+        }),
+        label(turned ? x - 5 : x + 5, top + 1 + index * 14, words, {
+          fill: ink.accent,
+          anchor: turned ? 'end' : 'start',
+          halo: true,
+        }),
+      );
+    }),
+    Number.isFinite(now) &&
+      g(
+        {},
+        el('circle', {
+          cx: axis.x(input.depthM),
+          cy: money.x(now),
+          r: 5,
+          fill: colours.ink,
+          stroke: colours.sheet,
+          'stroke-width': 1.35,
+        }),
+        label(axis.x(input.depthM), money.x(now) - 11, level(input.depthM), {
+          anchor: 'middle',
+          size: letters.table,
+          weight: 600,
+          halo: true,
+        }),
+      ),
+  ]);
+}
+
+/** The table behind the curve. */
+export function depthTable(input: DepthCurveInput): Table {
+  const unit = moneyUnit(input.currency, Math.max(0, ...input.points.map((point) => point.cost)));
+  return {
+    caption: 'Cost of the whole crossing against depth at midspan',
+    head: ['depth, m', unit.label],
+    rows: input.points.map((point) => [level(point.depthM), significant(point.cost / unit.per, 3)]),
+  };
+}

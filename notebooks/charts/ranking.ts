@@ -1,0 +1,132 @@
+import { currencySign, listed, money2, moneyUnit, odds, signed, significant, spansText } from '../format.ts';
+import { spansOf } from '../drawing/alongOption.ts';
+import type { Paper } from '../drawing/ink.ts';
+import { optionTitle } from '../drawing/optionWords.ts';
+import type { Piece } from '../drawing/piece.ts';
+import { el } from '../drawing/piece.ts';
+import { sheet } from '../drawing/sheet.ts';
+import { formInk } from '../forms/formInk.ts';
+import { glyph } from '../forms/glyph.ts';
+import { optionNumber } from '../forms/optionNumber.ts';
+import type { AppraisedOption, Standing } from '../model.ts';
+
+export interface RankingInput {
+  /** In the order in which they are to stand. */
+  readonly options: readonly AppraisedOption[];
+  readonly standing: Standing;
+  readonly budget: number | null;
+  readonly currency: string;
+  readonly reference: number | null;
+  readonly paper?: Paper;
+}
+
+/** Number and glyph of an option as a small drawing of its own, for tables and running text. */
+export function optionMark(
+  option: Pick<AppraisedOption, 'number' | 'form'>,
+  reference: number | null,
+  paper: Paper = 'colour',
+  withGlyph = true,
+): Piece {
+  const ink = formInk(paper, [], `mark-${String(option.number)}`);
+  const filled = option.number === reference;
+  return sheet(
+    withGlyph ? 60 : 22,
+    22,
+    `option ${String(option.number)}`,
+    [
+      optionNumber(option.number, 11, 11, { colour: filled ? ink.accent : ink.line(option.form), filled }),
+      withGlyph && glyph(option.form, 27, 3, ink.line(option.form)),
+    ],
+    'img',
+    'drawing mark',
+  );
+}
+
+/** What keeps an option from leading, or what speaks for it, in one line. */
+function why(
+  option: AppraisedOption,
+  input: RankingInput,
+): { readonly words: string; readonly fails: boolean } {
+  const out = option.rulings.filter((ruling) => ruling.effect === 'out');
+  if (option.status === 'out' || out.length > 0) return { words: out[0]?.because[0] ?? 'out', fails: true };
+  if (input.standing.leader === option.number) return { words: 'leads', fails: false };
+  const group = input.standing.groups.find((one) => one.includes(option.number)) ?? [];
+  const others = group.filter((number) => number !== option.number);
+  if (others.length > 0)
+    return { words: `cannot be separated from ${listed(others.map(String))}`, fails: false };
+  const caution = option.rulings.find((ruling) => ruling.effect === 'caution');
+  return { words: caution?.because[0] ?? '', fails: false };
+}
+
+/** Ranking under the budget: one row per option with what it costs, what it differs by, its odds and what decides. */
+export function ranking(input: RankingInput): Piece {
+  const { options, standing, currency, budget, reference } = input;
+  const unit = moneyUnit(currency, Math.max(0, ...options.map((option) => option.cost.p90)));
+  const base = options.find((option) => option.number === reference);
+  const money = (value: number): string => money2(value / unit.per);
+  const figure = (text: string, className = ''): Piece =>
+    el('td', { class: `figure ${className}`.trim() }, text);
+  const head = [
+    ['', ''],
+    ['option', ''],
+    ['spans, m', ''],
+    [unit.label, 'figure'],
+    ['10 to 90 %', 'figure'],
+    ...(base === undefined ? [] : [[`against ${String(base.number)}`, 'figure']]),
+    [`${currencySign(currency)}/m²`, 'figure'],
+    ...(budget === null ? [] : [['within budget', 'figure']]),
+    ['months', 'figure'],
+    ['highest use', 'figure'],
+    ['standing', ''],
+  ] as const;
+  return el(
+    'table',
+    { class: 'ranking' },
+    el(
+      'thead',
+      {},
+      el(
+        'tr',
+        {},
+        head.map(([text = '', className = '']) =>
+          el('th', { scope: 'col', class: className === '' ? undefined : className }, text),
+        ),
+      ),
+    ),
+    el(
+      'tbody',
+      {},
+      options.map((option) => {
+        const isBase = option === base;
+        const within = standing.within[option.number];
+        const reason = why(option, input);
+        const classes = ['choose', option.status, ...(isBase ? ['reference'] : [])].join(' ');
+        return el(
+          'tr',
+          { class: classes, 'data-option': option.number },
+          el('td', { class: 'mark' }, optionMark(option, reference, input.paper)),
+          el('th', { scope: 'row', class: 'name' }, optionTitle(option).split(', ').slice(0, 2).join(', ')),
+          el('td', { class: 'fig' }, spansText(spansOf(option))),
+          figure(money(option.cost.p50), standing.leader === option.number ? 'decides' : ''),
+          figure(`${money(option.cost.p10)} to ${money(option.cost.p90)}`),
+          base !== undefined &&
+            (isBase
+              ? el('td', { class: 'figure reference-word' }, 'reference')
+              : figure(signed((option.cost.p50 - base.cost.p50) / unit.per, 1))),
+          figure(significant(option.pricePerM2.withApproaches, 2)),
+          budget !== null &&
+            figure(
+              within === undefined ? '' : `${odds(within)} %`,
+              within !== undefined && within < 0.2 ? 'fails' : '',
+            ),
+          figure(significant(option.months.p50, 2)),
+          figure(
+            option.limitingCheck.utilisation.toFixed(2),
+            option.limitingCheck.utilisation > 1.0005 ? 'fails' : '',
+          ),
+          el('td', { class: reason.fails ? 'why fails' : 'why' }, reason.words),
+        );
+      }),
+    ),
+  );
+}

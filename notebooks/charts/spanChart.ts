@@ -1,0 +1,189 @@
+import { scaleLog } from 'd3-scale';
+import { fixed, length } from '../format.ts';
+import { colours, letters, pens } from '../drawing/ink.ts';
+import type { Paper } from '../drawing/ink.ts';
+import { label } from '../drawing/label.ts';
+import { textWidth, wrapText } from '../drawing/lettering.ts';
+import type { Piece } from '../drawing/piece.ts';
+import { el, g, num } from '../drawing/piece.ts';
+import { sheet } from '../drawing/sheet.ts';
+import type { FormInk } from '../forms/formInk.ts';
+import { formInk } from '../forms/formInk.ts';
+import { formLooks } from '../forms/formLook.ts';
+import { glyph } from '../forms/glyph.ts';
+import type { FormId, Status } from '../model.ts';
+import { gridUprights, levelLine, limitLine } from './marks.ts';
+import type { Table } from './table.ts';
+
+/** One form against span, m. */
+export interface SpanRow {
+  readonly form: FormId;
+  /** Usual, economical range. */
+  readonly usual: readonly [from: number, to: number];
+  /** What has been built; the usual range where left out. */
+  readonly built?: readonly [from: number, to: number];
+  /** 5, 50 and 95 % of built bridges, where known. */
+  readonly statistics?: readonly [p5: number, p50: number, p95: number];
+  readonly status: Status;
+  /** The number that decides, in words. */
+  readonly words: string;
+}
+
+export interface SpanChartInput {
+  /** In the order in which forms are listed everywhere. */
+  readonly rows: readonly SpanRow[];
+  readonly askedM: number | null;
+  /** Beside the asked span, e.g. '63 m asked: 60 clear, plus a pier'. */
+  readonly askedWords?: string;
+  readonly widthPx: number;
+  readonly paper?: Paper;
+  readonly prefix?: string;
+}
+
+const marked = [5, 10, 20, 50, 100, 200, 500, 1000, 2000];
+
+/** Bars of one row: built range thin, usual range thick, statistics as a grey line below with a tick at the median. */
+function bars(row: SpanRow, y: number, x: (m: number) => number, ink: FormInk): Piece {
+  const out = row.status === 'out';
+  const line = out ? colours.rule : ink.line(row.form);
+  const fill = out && ink.paper === 'colour' ? colours.rule : ink.bar(row.form);
+  const [from, to] = row.built ?? row.usual;
+  return g(
+    {},
+    el('path', {
+      d: `M${num(x(from))},${num(y)}H${num(x(to))}`,
+      stroke: line,
+      'stroke-width': pens.thick,
+      fill: 'none',
+    }),
+    el('rect', {
+      x: x(row.usual[0]),
+      y: y - 4,
+      width: Math.max(1, x(row.usual[1]) - x(row.usual[0])),
+      height: 8,
+      fill,
+      stroke: ink.barEdge(row.form),
+      'stroke-width': pens.fine,
+    }),
+    row.statistics !== undefined &&
+      el('path', {
+        d: `M${num(x(row.statistics[0]))},${num(y + 7.5)}H${num(x(row.statistics[2]))}M${num(x(row.statistics[1]))},${num(y + 5)}v5`,
+        stroke: colours.third,
+        'stroke-width': pens.fine,
+        fill: 'none',
+      }),
+  );
+}
+
+/** Forms against span on a log axis, each in, possible or out in words with the number that decides. */
+export function spanChart(input: SpanChartInput): Piece {
+  const { rows, askedM, widthPx } = input;
+  const ink = formInk(
+    input.paper ?? 'colour',
+    rows.map((row) => row.form),
+    input.prefix ?? 'spans',
+  );
+  const narrow = widthPx < 680;
+  const nameX = 42;
+  const left = narrow ? Math.max(130, widthPx * 0.36) : Math.max(190, Math.min(232, widthPx * 0.235));
+  const right = narrow ? widthPx - 62 : Math.min(left + 400, widthPx * 0.62);
+  const statusX = narrow ? widthPx : right + 26;
+  const wordsX = statusX + 56;
+  const known = rows
+    .flatMap((row) => [...row.usual, ...(row.built ?? [])])
+    .concat(askedM === null ? [] : [askedM]);
+  const low = Math.min(5, ...known);
+  const high = Math.max(100, ...known) * 1.05;
+  const scale = scaleLog([low, high], [left, right]);
+  const x = (m: number): number => scale(m);
+  const ticks = marked
+    .filter((m) => m >= low && m <= high)
+    .filter((m) => !narrow || [5, 20, 100, 500, 2000].includes(m));
+  const head = 32;
+  const heights = rows.map((row) => {
+    const lines = narrow
+      ? wrapText(row.words, widthPx - nameX, letters.drawing).length
+      : wrapText(row.words, widthPx - wordsX, letters.table).length;
+    return narrow ? 25 + lines * 13 : Math.max(25, 9 + lines * 16);
+  });
+  const tops = heights.map((_, index) => head + heights.slice(0, index).reduce((sum, one) => sum + one, 0));
+  const bottom = head + heights.reduce((sum, one) => sum + one, 0);
+  const foot = bottom + 20;
+  const hasStatistics = rows.some((row) => row.statistics !== undefined);
+
+  return sheet(
+    widthPx,
+    foot + 6,
+    `Structural forms against span${askedM === null ? '' : `, ${length(askedM)} m asked`}`,
+    [
+      ink.defs.length > 0 && el('defs', {}, ink.defs),
+      gridUprights(ticks.map(x), head - 6, bottom),
+      ticks.map((m) => label(x(m), head - 10, fixed(m, 0), { anchor: 'middle', fill: colours.second })),
+      !narrow && label(left - 12, head - 10, 'span, m', { anchor: 'end', fill: colours.second }),
+      rows.map((row, index) => {
+        const top = tops[index] ?? head;
+        const height = heights[index] ?? 25;
+        const y = narrow ? top + 13 : top + height / 2;
+        const out = row.status === 'out';
+        const ownInk = out ? colours.third : colours.ink;
+        const before = rows[index - 1];
+        const newFamily =
+          before !== undefined && formLooks[before.form].family !== formLooks[row.form].family;
+        const lines = narrow
+          ? wrapText(row.words, widthPx - nameX, letters.drawing)
+          : wrapText(row.words, widthPx - wordsX, letters.table);
+        const wordsY = narrow ? y + 18 : y + 4.5 - (lines.length - 1) * 8;
+        return g(
+          { class: `form ${row.status}` },
+          index > 0 && levelLine(0, widthPx, top, newFamily),
+          glyph(row.form, 0, y - 8, out ? colours.rule : ink.line(row.form)),
+          label(nameX, y + 4.5, formLooks[row.form].short, { size: letters.table, fill: ownInk }),
+          bars(row, y, x, ink),
+          label(statusX, y + 4.5, row.status, {
+            size: letters.table,
+            weight: out ? 400 : 600,
+            fill: ownInk,
+            anchor: narrow ? 'end' : 'start',
+          }),
+          lines.map((text, at) =>
+            label(narrow ? nameX : wordsX, wordsY + at * (narrow ? 13 : 16), text, {
+              size: narrow ? letters.drawing : letters.table,
+              fill: out ? colours.third : narrow ? colours.second : colours.ink,
+            }),
+          ),
+        );
+      }),
+      askedM !== null &&
+        limitLine(x(askedM), 2, bottom, input.askedWords ?? `${length(askedM)} m asked`, ink.accent, widthPx),
+      label(
+        narrow ? 0 : left,
+        foot,
+        `thick: usual range   thin: has been built${hasStatistics ? '   grey: 5, 50 and 95 % of built bridges' : ''}`.replace(
+          / {3}/g,
+          ' \u2002 ',
+        ),
+        { fill: colours.second },
+      ),
+    ],
+  );
+}
+
+/** Widest text a row of the chart can hold at a width, for those who write the words. */
+export const wordsRoom = (widthPx: number): number =>
+  Math.max(0, widthPx - Math.min(Math.max(190, widthPx * 0.235) + 400, widthPx * 0.62) - 82) /
+  textWidth('n', letters.table);
+
+/** The table behind the span chart. */
+export const spanTable = (input: SpanChartInput): Table => ({
+  caption: 'Structural forms against span, m',
+  head: ['form', 'usual from', 'to', 'built from', 'to', 'standing', 'because'],
+  rows: input.rows.map((row) => [
+    formLooks[row.form].name,
+    length(row.usual[0]),
+    length(row.usual[1]),
+    row.built === undefined ? '' : length(row.built[0]),
+    row.built === undefined ? '' : length(row.built[1]),
+    row.status,
+    row.words,
+  ]),
+});

@@ -1,0 +1,110 @@
+import { money2, odds } from '../format.ts';
+import type { FormInk } from '../forms/formInk.ts';
+import { optionNumber } from '../forms/optionNumber.ts';
+import type { AppraisedOption, Site, Standing } from '../model.ts';
+import type { Axis } from './axis.ts';
+import { optionWords } from './elevation.ts';
+import type { Frame } from './frame.ts';
+import type { Paper } from './ink.ts';
+import { colours, pens } from './ink.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num } from './piece.ts';
+import type { Scale } from './scale.ts';
+
+export interface StackInput {
+  readonly site: Site;
+  /** In the order in which they are to stand. */
+  readonly options: readonly AppraisedOption[];
+  readonly standing: Standing;
+  /** Money, or null where none is known. */
+  readonly budget: number | null;
+  readonly currency: string;
+  /** Number of the reference option, or null. */
+  readonly reference: number | null;
+  readonly widthPx: number;
+  readonly scale?: Scale;
+  /** Words beside an option's spans; made from its depths and road level where left out. */
+  readonly notes?: Readonly<Record<number, string>>;
+  readonly paper?: Paper;
+  readonly prefix?: string;
+}
+
+/** Room left of the sheet for the bar of the reference option, px; the drawing is that much wider than asked. */
+export const stackOutset = 14;
+
+/** Below this width the rows are laid out for a hand-held screen. */
+export const narrowBelow = 680;
+
+/** What all rows of one stack share. */
+export interface StackSheet {
+  readonly input: StackInput;
+  readonly ink: FormInk;
+  readonly scale: Scale;
+  readonly shown: { readonly fromM: number; readonly toM: number };
+  readonly axis: Axis;
+  readonly unit: { readonly per: number; readonly label: string };
+}
+
+export interface StackRow {
+  readonly piece: Piece;
+  readonly bottom: number;
+  readonly frame: Frame;
+}
+
+/** One row as something that can be chosen: number, form, spans and cost are its name. */
+export function chosenRow(
+  shared: StackSheet,
+  option: AppraisedOption,
+  top: number,
+  bottom: number,
+  children: readonly (Piece | null | false)[],
+): Piece {
+  const { input, unit } = shared;
+  const reference = input.reference === option.number;
+  const { p10, p50, p90 } = option.cost;
+  const within = input.standing.within[option.number];
+  const words = `${optionWords(option)}: ${money2(p50 / unit.per)} ${unit.label}, ${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}${within === undefined ? '' : `, ${odds(within)} % within budget`}${option.status === 'out' ? ', out' : ''}`;
+  return g(
+    {
+      class: reference ? 'row reference' : 'row',
+      role: 'button',
+      tabindex: 0,
+      'aria-pressed': reference ? 'true' : 'false',
+      'aria-label': words,
+      'data-option': option.number,
+    },
+    el('rect', {
+      class: 'frame',
+      x: -4,
+      y: top + 2,
+      width: input.widthPx + 8,
+      height: bottom - top - 4,
+      fill: colours.sheet,
+      'fill-opacity': 0,
+      stroke: 'none',
+    }),
+    children,
+    reference &&
+      el('path', {
+        d: `M${num(2.65 / 2 - stackOutset)},${num(top + 4)}V${num(bottom - 4)}`,
+        stroke: shared.ink.accent,
+        'stroke-width': pens.heavy,
+      }),
+  );
+}
+
+/** Number in its circle: filled for the reference, ring in the form's colour for the others, grey when out. */
+export function rowNumber(
+  shared: StackSheet,
+  option: AppraisedOption,
+  x: number,
+  y: number,
+  radius = 9.5,
+): Piece {
+  const filled = shared.input.reference === option.number;
+  return optionNumber(option.number, x, y, {
+    colour: filled ? shared.ink.accent : shared.ink.line(option.form),
+    filled,
+    radius,
+  });
+}

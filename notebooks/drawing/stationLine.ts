@@ -1,0 +1,169 @@
+import { colours, letters, pens } from './ink.ts';
+import { label } from './label.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num } from './piece.ts';
+import { sheet } from './sheet.ts';
+
+/** What a station's mark says: done, being worked out, failed, or held at older figures below a failure. */
+export type StationState = 'done' | 'pending' | 'failed' | 'held';
+
+export interface StationMark {
+  /** E.g. '3+020', or the number of a section for its post. */
+  readonly name: string;
+  /** Pixels down the sheet. */
+  readonly y: number;
+  readonly post?: boolean;
+  readonly state?: StationState;
+}
+
+export interface StationLineInput {
+  readonly heightPx: number;
+  /** From top to bottom. */
+  readonly marks: readonly StationMark[];
+  /** Station pointed at, with the stations it uses and those that use it. */
+  readonly joined?: {
+    readonly at: string;
+    readonly uses: readonly string[];
+    readonly usedBy: readonly string[];
+  };
+  /** Part of the sheet on the screen, px; spans that leave it end in words. */
+  readonly view?: { readonly top: number; readonly bottom: number };
+  /** Where the line stands in its band, px; 112 on the full sheet, 13 on a hand-held screen. */
+  readonly lineX?: number;
+  readonly bandPx?: number;
+}
+
+/** How far a span between two stations stands off the line, px. */
+export const bulge = (lengthPx: number, most = 84): number => Math.min(most, 18 + 0.055 * lengthPx);
+
+/** A span left of the line: full from what is used, on a bearing; dashed to what uses it, on a roller. */
+function span(lineX: number, from: number, to: number, used: boolean): Piece {
+  const out = Math.min(bulge(Math.abs(to - from)) * 1.33, Math.max(8, lineX - 4) * 1.33);
+  return g(
+    {},
+    el('path', {
+      d: `M${num(lineX)},${num(from)}C${num(lineX - out)},${num(from + (to - from) * 0.2)} ${num(lineX - out)},${num(from + (to - from) * 0.8)} ${num(lineX)},${num(to)}`,
+      fill: 'none',
+      stroke: colours.ink,
+      'stroke-width': pens.thin,
+      'stroke-dasharray': used ? undefined : '4 3',
+    }),
+    used
+      ? el('path', { d: `M${num(lineX)},${num(to)}l6.4,-3.4v6.8Z`, fill: colours.ink })
+      : el('circle', {
+          cx: lineX,
+          cy: to,
+          r: 2.6,
+          fill: colours.sheet,
+          stroke: colours.ink,
+          'stroke-width': pens.thin,
+        }),
+  );
+}
+
+/** The line from one mark to the next: full, dashed while being worked out, dotted below a failure, broken at it. */
+function stretch(lineX: number, from: number, to: number, state: StationState): Piece {
+  const dash = state === 'pending' ? '5 4' : state === 'held' ? '1.4 3.2' : undefined;
+  const middle = (from + to) / 2;
+  const d =
+    state === 'failed'
+      ? `M${num(lineX)},${num(from)}V${num(middle - 9)}l-6,4l12,6l-6,4V${num(to)}`
+      : `M${num(lineX)},${num(from)}V${num(to)}`;
+  return el('path', {
+    d,
+    fill: 'none',
+    stroke: colours.ink,
+    'stroke-width': pens.medium,
+    'stroke-dasharray': dash,
+  });
+}
+
+/** Words at the end of the screen for spans that leave it. */
+function leavers(names: readonly string[], lineX: number, y: number, verb: 'to' | 'from'): Piece | null {
+  const [first] = names;
+  if (first === undefined) return null;
+  const more = names.length > 1 ? `, ${String(names.length - 1)} more` : '';
+  return label(lineX - 8, y, `${verb} ${first}${more}`, { anchor: 'end', size: letters.drawing, halo: true });
+}
+
+/** The station line in its band, to be laid over the left of the sheet. */
+export function stationLine(input: StationLineInput): Piece {
+  const lineX = input.lineX ?? 112;
+  const { marks, joined, view } = input;
+  const yOf = new Map(marks.map((mark) => [mark.name, mark.y]));
+  const at = joined === undefined ? undefined : yOf.get(joined.at);
+  const inView = (y: number): boolean => view === undefined || (y >= view.top && y <= view.bottom);
+  const place = (names: readonly string[]): { seen: [string, number][]; gone: string[] } => {
+    const known = names.flatMap((name) => {
+      const y = yOf.get(name);
+      return y === undefined ? [] : [[name, y] as [string, number]];
+    });
+    return {
+      seen: known.filter(([, y]) => inView(y)),
+      gone: known.filter(([, y]) => !inView(y)).map(([name]) => name),
+    };
+  };
+  const uses = place(joined?.uses ?? []);
+  const usedBy = place(joined?.usedBy ?? []);
+  let from = 0;
+  let state: StationState = 'done';
+  const stretches: Piece[] = [];
+  for (const mark of marks) {
+    const next = mark.state ?? 'done';
+    stretches.push(
+      stretch(
+        lineX,
+        from,
+        mark.y,
+        next === 'failed' ? 'done' : next === 'done' ? (state === 'failed' ? 'failed' : 'done') : next,
+      ),
+    );
+    from = mark.y;
+    state = next;
+  }
+  stretches.push(
+    stretch(
+      lineX,
+      from,
+      input.heightPx,
+      state === 'pending' ? 'pending' : state === 'done' ? 'done' : 'held',
+    ),
+  );
+  return sheet(
+    input.bandPx ?? 168,
+    input.heightPx,
+    'Station line of this page',
+    [
+      stretches,
+      marks.map((mark) =>
+        mark.post === true
+          ? el('path', {
+              d: `M${num(lineX - 12.5)},${num(mark.y)}h25`,
+              stroke: colours.ink,
+              'stroke-width': pens.heavy,
+            })
+          : mark.state === 'pending'
+            ? el('path', {
+                d: `M${num(lineX)},${num(mark.y - 4)}l3.4,4l-3.4,4l-3.4,-4Z`,
+                fill: colours.sheet,
+                stroke: colours.ink,
+                'stroke-width': pens.thin,
+              })
+            : el('path', {
+                d: `M${num(lineX - 4.5)},${num(mark.y)}h9`,
+                stroke: colours.ink,
+                'stroke-width': pens.thin,
+              }),
+      ),
+      at !== undefined && [
+        uses.seen.map(([, y]) => span(lineX, at, y, true)),
+        usedBy.seen.map(([, y]) => span(lineX, at, y, false)),
+        el('circle', { cx: lineX, cy: at, r: 5, fill: colours.ink }),
+        view !== undefined && leavers(uses.gone, lineX, view.top + 14, 'from'),
+        view !== undefined && leavers(usedBy.gone, lineX, view.bottom - 8, 'to'),
+      ],
+    ],
+    'img',
+    'stations',
+  );
+}

@@ -1,0 +1,203 @@
+import { currencySign, length, money2, odds, significant, spansText } from '../format.ts';
+import { glyph } from '../forms/glyph.ts';
+import type { AppraisedOption } from '../model.ts';
+import { spansOf, supportChainages } from './alongOption.ts';
+import { barredBrackets, barredWash } from './clearances.ts';
+import { dimensionChain } from './dimension.ts';
+import { elevationBody, levelRange } from './elevation.ts';
+import { frameOf } from './frame.ts';
+import { colours, letters, pens } from './ink.ts';
+import { interval } from './interval.ts';
+import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
+import { mainSpan, optionNote, optionTitle } from './optionWords.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num } from './piece.ts';
+import { scaleBar } from './scaleBar.ts';
+import { sheet } from './sheet.ts';
+import type { StackRow, StackSheet } from './stackSheet.ts';
+import { chosenRow, rowNumber, stackOutset } from './stackSheet.ts';
+
+function title(shared: StackSheet, option: AppraisedOption, y: number, room: number): Piece {
+  const { input } = shared;
+  const reference = input.reference === option.number;
+  const name = optionTitle(option);
+  const spans = spansText(spansOf(option));
+  const note = input.notes?.[option.number] ?? optionNote(input.site, option);
+  const end = reference
+    ? ['reference', shared.ink.accent]
+    : option.status === 'out'
+      ? ['out', colours.ink]
+      : null;
+  let x = 71;
+  const parts: Piece[] = [];
+  const put = (text: string, size: number, weight: 400 | 600, fill: string, must: boolean): void => {
+    const width = textWidth(text, size, weight);
+    if (!must && x + width > room) return;
+    parts.push(label(x, y, text, { size, weight, fill }));
+    x += width + 16;
+  };
+  put(name, letters.prose, reference ? 600 : 400, colours.ink, true);
+  put(spans, letters.table, 400, colours.ink, true);
+  const reserved = end === null ? 0 : textWidth(end[0] ?? '', letters.table, 600) + 16;
+  if (x + textWidth(note, letters.table) + reserved <= room)
+    put(note, letters.table, 400, colours.second, true);
+  if (end !== null) put(end[0] ?? '', letters.table, 600, end[1] ?? colours.ink, true);
+  return g(
+    { class: 'title' },
+    rowNumber(shared, option, 12, y - 5),
+    glyph(option.form, 28, y - 13, shared.ink.line(option.form)),
+    parts,
+  );
+}
+
+/** P50 left, range, price per m2, interval on the common axis and the chance within the budget. */
+function figures(shared: StackSheet, option: AppraisedOption, left: number, right: number, y: number): Piece {
+  const { input, axis, unit, ink } = shared;
+  const reference = input.reference === option.number;
+  const { p10, p50, p90 } = option.cost;
+  const within = input.standing.within[option.number];
+  const price = `${significant(option.pricePerM2.withApproaches, 2)} ${currencySign(input.currency)}/m²`;
+  return g(
+    { class: 'figures' },
+    label(left, y, money2(p50 / unit.per), {
+      size: letters.section,
+      weight: reference ? 600 : 400,
+      halo: true,
+    }),
+    label(
+      right - textWidth('88 888 €/m²', letters.table) - 4,
+      y,
+      `${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}`,
+      { size: letters.table, fill: colours.second, anchor: 'end', halo: true },
+    ),
+    label(right, y, price, { size: letters.table, fill: colours.second, anchor: 'end', halo: true }),
+    el('path', {
+      d: `M${num(left)},${num(y + 16)}H${num(right)}`,
+      stroke: colours.grid,
+      'stroke-width': pens.fine,
+    }),
+    interval(option, axis.x, y + 16, ink),
+    within !== undefined &&
+      label(right, y + 36, `${odds(within)} % chance within budget`, {
+        fill: colours.second,
+        anchor: 'end',
+        halo: true,
+      }),
+  );
+}
+
+function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyPx: number): StackRow {
+  const { input, scale, ink } = shared;
+  const { site } = input;
+  const range = levelRange(site, option, scale < 2000);
+  const titleY = top + 23;
+  const frame = frameOf(scale, shared.shown, 0, { levelM: range.topM, y: titleY + 12 });
+  const dimensionY = Math.max(frame.y(range.bottomM) + 6, titleY + 70);
+  const bottom = dimensionY + 12;
+  const chainages = supportChainages(option);
+  const spans = spansOf(option);
+  const deckY = frame.y(option.profile.startLevelM);
+  const narrowest = Math.min(...spans) * frame.pxPerM;
+  const figureY = Math.max(deckY + 10, titleY + 24);
+  const piece = chosenRow(shared, option, top, bottom, [
+    title(shared, option, titleY, bodyPx),
+    elevationBody(site, option, frame, ink, range, { plain: scale >= 2000 }),
+    dimensionChain(
+      chainages.map(frame.x),
+      dimensionY,
+      spans.map((span) =>
+        textWidth(length(span), 11) < narrowest || span * frame.pxPerM > 26 ? length(span) : '',
+      ),
+      {
+        boldest: mainSpan(option),
+        halo: true,
+        size: narrowest > 30 ? letters.table : letters.drawing,
+        colour: colours.ink,
+      },
+    ),
+    figures(shared, option, bodyPx + 22, input.widthPx, Math.min(figureY, bottom - 42)),
+  ]);
+  return { piece, bottom, frame };
+}
+
+function axisHead(shared: StackSheet, y: number, right: number): Piece {
+  const { axis, unit } = shared;
+  return g(
+    { class: 'axis' },
+    axis.ticks.map(
+      (tick) =>
+        axis.x(tick) < right - 26 &&
+        label(axis.x(tick), y, String(tick / unit.per), { anchor: 'middle', fill: colours.second }),
+    ),
+    label(right, y, unit.label, { anchor: 'end', fill: colours.second }),
+  );
+}
+
+/** Line of the budget through everything, named at its head. */
+function budgetLine(shared: StackSheet, top: number, bottom: number, words: boolean): Piece | null {
+  const { input, axis, unit, ink } = shared;
+  if (input.budget === null) return null;
+  const x = axis.x(input.budget);
+  const text = `budget ${significant(input.budget / unit.per, 3)}`;
+  const half = textWidth(text, letters.drawing, 600) / 2;
+  return g(
+    { class: 'budget' },
+    el('path', {
+      d: `M${num(x)},${num(top)}V${num(bottom)}`,
+      stroke: ink.accent,
+      'stroke-width': pens.heavy,
+    }),
+    words &&
+      label(Math.min(x, input.widthPx - half), top - 5, text, {
+        anchor: 'middle',
+        weight: 600,
+        fill: ink.accent,
+      }),
+  );
+}
+
+/** All rows beside one another on a full sheet: elevations left, costs right. */
+export function wideStack(shared: StackSheet, bodyPx: number): Piece {
+  const { input, ink, scale } = shared;
+  const { site } = input;
+  const head = 46;
+  const rows: StackRow[] = [];
+  let top = head;
+  for (const option of input.options) {
+    const row = wideRow(shared, option, top, bodyPx);
+    rows.push(row);
+    top = row.bottom + 6;
+  }
+  const bottom = top;
+  const first = rows[0]?.frame ?? frameOf(scale, shared.shown, 0, { levelM: 0, y: head });
+  const height = bottom + 40;
+  return sheet(
+    input.widthPx + stackOutset,
+    height,
+    `Elevations of ${String(input.options.length)} options on one chainage and one scale, with their cost; choose one to compare the others with it`,
+    [
+      ink.defs.length > 0 && el('defs', {}, ink.defs),
+      g(
+        { transform: `translate(${String(stackOutset)} 0)` },
+        barredWash(site, first, head - 12, bottom),
+        barredBrackets(site, first, head - 18, ink.accent),
+        axisHead(shared, head - 6, input.widthPx),
+        budgetLine(shared, head - 18, bottom, true),
+        rows.map(
+          ({ bottom: at }, index) =>
+            index < rows.length - 1 &&
+            el('path', {
+              d: `M0,${num(at + 3)}H${num(input.widthPx)}`,
+              stroke: colours.grid,
+              'stroke-width': pens.thin,
+            }),
+        ),
+        rows.map(({ piece }) => piece),
+        scaleBar(scale, Math.max(first.x(site.startM), 8), bottom + 22, { widthPx: 400 }),
+      ),
+    ],
+    'group',
+    'drawing stack',
+  );
+}

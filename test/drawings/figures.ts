@@ -1,0 +1,193 @@
+import type { QuantityColumn, PublishedBand } from '../../notebooks/charts/quantityMarks.ts';
+import type { SpanRow } from '../../notebooks/charts/spanChart.ts';
+import type { Measure } from '../../notebooks/charts/tradeOffs.ts';
+import type { Check } from '../../lib/model/index.ts';
+
+/** Invented figures to try the charts with, beside the invented crossing of `fixture.ts`. */
+export const spanRows: readonly SpanRow[] = [
+  {
+    form: 'slab',
+    usual: [8, 22],
+    built: [5, 35],
+    statistics: [6, 12, 25],
+    status: 'out',
+    words: 'stops at 35 m; in if the opening were 32 m',
+  },
+  { form: 'portal-frame', usual: [10, 30], built: [6, 50], status: 'out', words: 'stops at 50 m' },
+  {
+    form: 'precast-i',
+    usual: [20, 45],
+    built: [15, 75],
+    statistics: [17, 31, 46],
+    status: 'possible',
+    words: 'one piece stops at 50 m; 63 m is spliced',
+  },
+  {
+    form: 'precast-trough',
+    usual: [18, 36],
+    built: [13, 44],
+    status: 'out',
+    words: 'stops at 44 m; in if the opening were 41 m',
+  },
+  { form: 'half-through', usual: [15, 40], built: [10, 55], status: 'out', words: 'stops at 55 m' },
+  {
+    form: 'composite-i',
+    usual: [35, 90],
+    built: [20, 130],
+    statistics: [24, 48, 88],
+    status: 'in',
+    words: '28 m and 27 m inside its usual range',
+  },
+  { form: 'adjacent-box', usual: [12, 35], built: [10, 45], status: 'out', words: 'stops at 45 m' },
+  {
+    form: 'composite-box',
+    usual: [50, 110],
+    built: [36, 160],
+    status: 'in',
+    words: 'kept as variant 2a; pays only on a curve',
+  },
+  {
+    form: 'concrete-box',
+    usual: [30, 60],
+    built: [20, 75],
+    status: 'out',
+    words: 'no props in the river; launching ends at 60',
+  },
+  {
+    form: 'cantilever-box',
+    usual: [75, 150],
+    built: [60, 250],
+    statistics: [60, 120, 230],
+    status: 'in',
+    words: '12 m below its usual range; goes to 100 m',
+  },
+  {
+    form: 'steel-box',
+    usual: [110, 220],
+    built: [70, 300],
+    status: 'out',
+    words: 'deck plate too dear below 100 m',
+  },
+  {
+    form: 'truss',
+    usual: [80, 250],
+    built: [45, 500],
+    status: 'possible',
+    words: '17 m below; sells 0.8 m of road level',
+  },
+  {
+    form: 'tied-arch',
+    usual: [80, 200],
+    built: [50, 300],
+    statistics: [55, 140, 250],
+    status: 'possible',
+    words: '17 m below; sells 0.8 m of road level',
+  },
+  {
+    form: 'deck-arch',
+    usual: [90, 250],
+    built: [60, 420],
+    status: 'out',
+    words: 'no rise above the flood; ground unknown',
+  },
+  {
+    form: 'extradosed',
+    usual: [110, 200],
+    built: [80, 275],
+    status: 'out',
+    words: 'gains nothing below 80 m',
+  },
+  {
+    form: 'cable-stayed',
+    usual: [150, 500],
+    built: [90, 1100],
+    status: 'possible',
+    words: '27 m below; kept at the client’s wish',
+  },
+  { form: 'suspension', usual: [400, 1900], built: [250, 2020], status: 'out', words: 'starts at 250 m' },
+];
+
+export const published: Readonly<Record<number, Partial<Record<QuantityColumn, PublishedBand>>>> = {
+  1: { concrete: { low: 0.45, high: 0.65 }, bars: { low: 70, high: 95 }, strand: { low: 14, high: 25 } },
+  2: { concrete: { low: 0.25, high: 0.32 }, steel: { low: 180, high: 250 }, bars: { low: 55, high: 75 } },
+  3: { concrete: { low: 0.65, high: 0.9 }, bars: { low: 95, high: 130 }, strand: { low: 26, high: 45 } },
+};
+
+export const checks: readonly Check[] = [
+  {
+    id: 'bending-midspan',
+    label: 'bending at midspan',
+    demand: 51.6,
+    capacity: 60,
+    unit: 'MNm',
+    utilisation: 0.86,
+  },
+  {
+    id: 'bending-pier',
+    label: 'bending at the piers',
+    demand: 97,
+    capacity: 100,
+    unit: 'MNm',
+    utilisation: 0.97,
+  },
+  { id: 'shear-pier', label: 'shear at the piers', demand: 7.8, capacity: 10, unit: 'MN', utilisation: 0.78 },
+  {
+    id: 'fatigue',
+    label: 'fatigue, cross-girder weld',
+    demand: 91,
+    capacity: 100,
+    unit: 'MPa',
+    utilisation: 0.91,
+  },
+  { id: 'deflection', label: 'live deflection', demand: 88, capacity: 112, unit: 'mm', utilisation: 0.78 },
+];
+
+export const depthPoints = Array.from({ length: 20 }, (_, index) => {
+  const depthM = 1.7 + index * 0.1;
+  const lift = Math.max(0, depthM - 2.72);
+  return { depthM, cost: (9.7 + 0.55 * (depthM - 2.35) ** 2 + 0.75 * lift) * 1e6 };
+});
+
+const spread = (p10: number, p50: number, p90: number): { p10: number; p50: number; p90: number } => ({
+  p10,
+  p50,
+  p90,
+});
+export const measures: readonly Measure[] = [
+  {
+    name: 'Programme, months',
+    places: 0,
+    values: {
+      1: spread(17, 20, 24),
+      2: spread(14, 17, 21),
+      3: spread(20, 24, 29),
+      4: spread(16, 19, 24),
+      5: spread(23, 28, 36),
+      6: spread(17, 20, 25),
+    },
+  },
+  {
+    name: 'Depth at the railway, m',
+    places: 2,
+    values: {
+      1: spread(2.75, 2.75, 2.75),
+      2: spread(2.3, 2.3, 2.3),
+      3: spread(2.85, 2.85, 2.85),
+      4: spread(1.9, 1.9, 1.9),
+      5: spread(1.6, 1.6, 1.6),
+      6: spread(1.9, 1.9, 1.9),
+    },
+  },
+  {
+    name: 'Carbon to opening, t per m²',
+    places: 1,
+    values: {
+      1: spread(1.7, 2.1, 2.7),
+      2: spread(1.5, 1.9, 2.5),
+      3: spread(1.8, 2.3, 3),
+      4: spread(1.5, 1.9, 2.6),
+      5: spread(1.9, 2.5, 3.4),
+      6: spread(1.6, 2, 2.7),
+    },
+  },
+];
