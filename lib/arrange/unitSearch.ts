@@ -1,5 +1,12 @@
 import type { CostTable, FormId } from '../model/index.ts';
-import { halfCosts, spanCosts, type HalfCosts, type SpanCosts, type SupportCosts } from './curves.ts';
+import {
+  halfCosts,
+  spanCostAt,
+  spanCosts,
+  type HalfCosts,
+  type SpanCosts,
+  type SupportCosts,
+} from './curves.ts';
 import { SLACK, type Limits } from './limits.ts';
 
 /** One continuous unit that starts at position 0 of `X` and ends at any of the positions firstEnd..lastEnd. */
@@ -26,12 +33,20 @@ export type Visit = (
   trace: (end: number, spans: number) => number[],
 ) => boolean;
 
-/** Above this many positions only counts near the fewest possible are searched for each governing span. */
+/**
+ * Full search up to this many positions and for one end only: governing spans by whole metres where that is at most
+ * `MOST_GOVERNING` of them, every number of spans. Longer crossings and approaches, which have many ends, take fewer
+ * governing spans, in even steps of their logarithm, and numbers of spans near the fewest possible for each.
+ */
 const MANY = 700;
 const MORE_SPANS = 3;
-/** Governing spans tried: whole metres where that is at most this many, else in even steps of their logarithm. */
 const MOST_GOVERNING = 64;
+const APPROACH_GOVERNING = 32;
 const FEW_GOVERNING = 16;
+
+function manyEnds(task: UnitTask): boolean {
+  return task.lastEnd > task.firstEnd;
+}
 
 /** Widest gap between neighbouring candidates that every layout has to span, m. */
 function forcedSpan(X: Float64Array, last: number): number {
@@ -47,7 +62,7 @@ export function governingSpans(task: UnitTask): number[] {
   const most = Math.min(limits.maxSpanM, X[lastEnd]!);
   if (!(least <= most + SLACK)) return [];
   const range = most - least;
-  const count = X.length > MANY ? FEW_GOVERNING : MOST_GOVERNING;
+  const count = X.length > MANY ? FEW_GOVERNING : manyEnds(task) ? APPROACH_GOVERNING : MOST_GOVERNING;
   if (range <= count) {
     const steps = Math.max(Math.ceil(range - SLACK), 0);
     return Array.from({ length: steps + 1 }, (_, i) => Math.min(least + i, Math.max(most, least)));
@@ -62,7 +77,7 @@ export function mostSpans(task: UnitTask, governingM: number): number {
   const lengthM = X[lastEnd]!;
   const interior = Math.max(limits.minSpacingM, limits.interiorLeast * governingM);
   const ever = Math.max(2, Math.floor(2 + (lengthM - 2 * limits.minSpacingM) / interior + SLACK));
-  if (X.length <= MANY) return ever;
+  if (X.length <= MANY && !manyEnds(task)) return ever;
   return Math.min(ever, fewestSpans(limits, lengthM, governingM) + MORE_SPANS);
 }
 
@@ -100,9 +115,9 @@ function close(layers: Layers, k: number, end: number, cost: number, z: number, 
 function lastSpan(layers: Layers, z: number, end: number): number {
   const { task, cost, half } = layers;
   const s = task.X[end]! - task.X[z]!;
-  const i = s | 0;
-  const deck = cost[i]! + (s - i) * (cost[i + 1]! - cost[i]!);
-  return deck + half.A[z]! + half.B[z]! * s + (task.endIsPier ? half.A[end]! + half.B[end]! * s : 0);
+  return (
+    spanCostAt(cost, s) + half.A[z]! + half.B[z]! * s + (task.endIsPier ? half.A[end]! + half.B[end]! * s : 0)
+  );
 }
 
 /** Layouts of one and two spans; fills the costs of reaching each first pier. */
@@ -113,8 +128,7 @@ function firstTwo(layers: Layers, F: Float64Array): void {
   for (let x = 1; x < X.length && X[x]! <= G + SLACK; x += 1) {
     const s = X[x]!;
     if (s < limits.minSpacingM - SLACK) continue;
-    const i = s | 0;
-    const deck = cost[i]! + (s - i) * (cost[i + 1]! - cost[i]!);
+    const deck = spanCostAt(cost, s);
     if (x >= firstEnd && x <= lastEnd && s >= limits.minSpanM - SLACK) {
       close(layers, 1, x, deck + (task.endIsPier ? half.A[x]! + half.B[x]! * s : 0), 0, 0);
     }
@@ -194,8 +208,7 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array,
       if (f === Infinity) continue;
       const s = xz - X[y]!;
       if (j === 2 && (X[y]! < limits.endLeast * s - SLACK || X[y]! > limits.endMost * s + SLACK)) continue;
-      const i = s | 0;
-      const v = f + cost[i]! + (s - i) * (cost[i + 1]! - cost[i]!) + A[y]! + B[y]! * s + A[z]! + B[z]! * s;
+      const v = f + spanCostAt(cost, s) + A[y]! + B[y]! * s + A[z]! + B[z]! * s;
       S[count] = s;
       V[count] = v;
       Y[count] = y;
