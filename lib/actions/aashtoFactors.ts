@@ -64,8 +64,7 @@ export function aashtoFactors(deck: GirderDeck): GirderFactors {
 }
 
 /**
- * Correction of the inner factor for the outer girder: moment 0.77 + de/9.1, shear 0.6 + de/10, at least 1 for moment
- * by common practice is not asked for; de from the web to the kerb, -1 to 5.5 ft (4.6.2.2.2d-1, from memory).
+ * Correction of the inner factor for the outer girder: moment 0.77 + de/9.1, shear 0.6 + de/10; de from the web to the kerb, -1 to 5.5 ft (4.6.2.2.2d-1, from memory).
  */
 export function outerCorrection(kerbBeyondM: number): {
   moment: number;
@@ -82,6 +81,9 @@ export function outerCorrection(kerbBeyondM: number): {
 
 function outside(what: string, value: number, least: number, most: number, unit: string): string[] {
   if (value >= least * (1 - 1e-9) && value <= most * (1 + 1e-9)) return [];
-  const upTo = most === Infinity ? '' : ` to ${most}`;
-  return [`${what} ${Number(value.toPrecision(4))} ${unit} is outside ${least}${upTo}`.trim()];
+  const where = most === Infinity ? 'below' : 'outside';
+  const range = most === Infinity ? `${least}` : `${least} to ${most}`;
+  return [
+    [what, Number(value.toPrecision(4)), unit, 'is', where, range].filter((word) => word !== '').join(' '),
+  ];
 }

@@ -94,7 +94,12 @@ const schema = z.strictObject({
     prestress: positive,
     alphaConcrete: positive,
   }),
-  deflection: z.strictObject({ loading: z.string(), limitRatio: positive, source: z.string() }),
+  /** Shares of vehicle and uniform load whose worst deflection is limited to span / limitRatio. */
+  deflection: z.strictObject({
+    combinations: z.array(z.strictObject({ vehicle: notNegative, uniform: notNegative })).min(1),
+    limitRatio: positive,
+    source: z.string(),
+  }),
   /** Braking force = constant + length x perM within limits, per loaded lane or for the whole carriageway. */
   braking: z.strictObject({
     perLane: z.boolean(),

@@ -9,6 +9,7 @@ import {
   type Extremes,
   type LineBeam,
 } from '../mechanics/index.ts';
+import { loadStandard } from './loadStandard.ts';
 import { plainQuest, trafficOnLine } from './trafficOnLine.ts';
 import type { TrafficLoad } from './trafficLoad.ts';
 
@@ -25,7 +26,7 @@ export interface TrafficEnvelope {
   readonly reactionMinKN: Float64Array;
   readonly springMaxKN: Float64Array;
   readonly springMinKN: Float64Array;
-  /** Greatest downward deflection, m. Zeros unless asked for. */
+  /** Greatest downward deflection, m, under the combinations the standard limits it for; zeros when left out. */
   readonly deflectionM: Float64Array;
   /** True when an adverse loaded length lies beyond the reach of the standard: the result is then on the safe side. */
   readonly beyondScope: boolean;
@@ -102,14 +103,28 @@ export function trafficEnvelope(
     max[j < supports ? j : j - supports] = out.max;
     min[j < supports ? j : j - supports] = out.min;
   });
-  if (options.deflection !== false) {
-    for (let s = 0; s < n; s++) {
-      if (beam.supportAt.includes(s)) continue;
-      trafficOnLine(load, track, deflectionLine(beam, s), plainQuest, out);
-      result.deflectionM[s] = out.max;
+  if (options.deflection !== false) deflections(beam, load, result.deflectionM);
+  return { ...result, beyondScope: beyond };
+}
+
+/** Worst of the combinations the standard limits deflections for. */
+function deflections(beam: LineBeam, load: TrafficLoad, out: Float64Array): void {
+  const track = beamTrack(beam);
+  const loads = loadStandard(load.standard).deflection.combinations.map((share) => ({
+    ...load,
+    vehicleFactor: load.vehicleFactor * share.vehicle,
+    udlKNm: load.udlKNm * share.uniform,
+    footwayKNm: load.footwayKNm * share.uniform,
+  }));
+  const extremes: Extremes = { max: 0, min: 0 };
+  for (let s = 0; s < out.length; s++) {
+    if (beam.supportAt.includes(s)) continue;
+    const line = deflectionLine(beam, s);
+    for (const combined of loads) {
+      trafficOnLine(combined, track, line, plainQuest, extremes);
+      out[s] = Math.max(out[s]!, extremes.max);
     }
   }
-  return { ...result, beyondScope: beyond };
 }
 
 function emptyEnvelope(beam: LineBeam): Omit<TrafficEnvelope, 'beyondScope'> {

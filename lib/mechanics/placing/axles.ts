@@ -8,7 +8,7 @@ export interface Extremes {
 
 /**
  * Runs a group over an influence line. Candidates are the swept placings, the vertex of the parabola through the best of
- * them and its neighbours, and every heavy axle on the section itself, where the line has its peak or jump.
+ * them and its neighbours, and every axle on the section itself, where the line has its peak or jump.
  * @param line element line on the stations of the track
  * @param section station of the section the line belongs to, or -1 for a line without peak or jump (reaction, deflection)
  * @returns the placings, which hold the sums of this line until the next run
@@ -125,7 +125,7 @@ function vertexValue(
   return at === placings.positionM[k] ? 0 : effectAt(track, group, line, at, sign);
 }
 
-/** Each heavy axle on the section: just right of it, as the placings read a jump, and just left of it. */
+/** Each axle on the section: just right of it, as the placings read a jump, and just left of it. */
 function onSection(
   placings: Placings,
   group: AxleGroup,
@@ -134,14 +134,14 @@ function onSection(
   stations: number,
   out: Extremes,
 ): void {
-  const { heavy, positive, negative, onStation, swept } = placings;
+  const { positive, negative, onStation, swept } = placings;
+  const whole = group.whole;
   const before = section > 0 ? line[4 * section - 2]! : line[0]!;
   const after = 4 * section < line.length ? line[4 * section]! : before;
-  for (let h = 0; h < heavy.length; h++) {
-    const k = onStation[h * stations + section]!;
-    if (k >= swept) sumPlacings(placings, line, group.atM.length, group.whole, k, k + 1);
-    const load = group.loadKN[heavy[h]!]!;
-    const whole = group.whole;
+  for (let i = 0; i < group.atM.length; i++) {
+    const k = onStation[i * stations + section]!;
+    if (k >= swept) sumPlacings(placings, line, group.atM.length, whole, k, k + 1);
+    const load = group.loadKN[i]!;
     const toLeftMax = load * (whole ? before - after : Math.max(before, 0) - Math.max(after, 0));
     const toLeftMin = load * (whole ? before - after : Math.min(before, 0) - Math.min(after, 0));
     out.max = Math.max(out.max, positive[k]! + Math.max(0, toLeftMax));

@@ -18,21 +18,19 @@ export interface Track {
 }
 
 /**
- * Positions of a group in which one of its heavy axles stands on a station, with the cubic weights that read an influence
+ * Positions of a group in which one of its axles stands on a station, with the cubic weights that read an influence
  * line under each axle. The first `swept` of them are in rising order and are tried for every line: all of them on a
- * kinked track, those of one heavy axle on a smooth one. The rest serve lines with a peak at a known station.
+ * kinked track, those of its heaviest axle on a smooth one. The rest serve lines with a peak at a known station.
  */
 export interface Placings {
   readonly swept: number;
-  /** Axles that were set on stations: at least half as heavy as the heaviest, for no peak stands under a light one. */
-  readonly heavy: readonly number[];
   /** Position of the first axle, m. */
   readonly positionM: Float64Array;
   /** For placing k and axle i, at k * axles + i: the first entry of its element in an element line. */
   readonly entry: Int32Array;
   /** Four weights for each of the same, at 4 * (k * axles + i); nil off the track; axle load included. */
   readonly weight: Float64Array;
-  /** Placing in which heavy axle number h stands on station s, at h * stations + s. */
+  /** Placing in which axle i stands on station s, at i * stations + s. */
   readonly onStation: Int32Array;
   /** Sums of the line last summed: positive parts, negative parts (both the whole for a whole group). */
   readonly positive: Float64Array;
@@ -71,15 +69,15 @@ export function placingsOf(track: Track, group: AxleGroup): Placings {
 function makePlacings({ xM, kinked }: Track, group: AxleGroup): Placings {
   const stations = xM.length;
   const axles = group.atM.length;
-  const heaviest = Math.max(...group.loadKN);
-  const heavy = group.loadKN.flatMap((load, i) => (load >= heaviest / 2 ? [i] : []));
-  const count = stations * heavy.length;
+  const count = stations * axles;
   const first = Float64Array.from(
     { length: count },
-    (_, key) => xM[key % stations]! - group.atM[heavy[Math.floor(key / stations)]!]!,
+    (_, key) => xM[key % stations]! - group.atM[Math.floor(key / stations)]!,
   );
+  // Keys in the order of placings: on a smooth track those of the heaviest axle come first.
+  const lead = group.loadKN.indexOf(Math.max(...group.loadKN));
   const swept = kinked ? count : stations;
-  const order = Uint32Array.from({ length: count }, (_, key) => key);
+  const order = Uint32Array.from({ length: count }, (_, k) => (k + lead * stations) % count);
   order.subarray(0, swept).sort((a, b) => first[a]! - first[b]!);
 
   const positionM = new Float64Array(count);
@@ -90,7 +88,7 @@ function makePlacings({ xM, kinked }: Track, group: AxleGroup): Placings {
     positionM[k] = first[key]!;
     onStation[key] = k;
     const station = key % stations;
-    const reference = heavy[Math.floor(key / stations)]!;
+    const reference = Math.floor(key / stations);
     for (let i = 0; i < axles; i++) {
       // The axle on the station stands exactly there, just to its right, whatever rounding says.
       const x = i === reference ? xM[station]! : first[key]! + group.atM[i]!;
@@ -99,7 +97,6 @@ function makePlacings({ xM, kinked }: Track, group: AxleGroup): Placings {
   });
   return {
     swept,
-    heavy,
     positionM,
     entry,
     weight,
