@@ -1,4 +1,5 @@
 import type { FormId } from '../model/index.ts';
+import { cableStayed } from './cable-stayed/index.ts';
 import { compositeI } from './composite-i/index.ts';
 import type { FormModule } from './formModule.ts';
 import { truss } from './truss/index.ts';
@@ -9,6 +10,7 @@ export type { FormModule, Pattern } from './formModule.ts';
 export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   'composite-i': compositeI,
   truss,
+  'cable-stayed': cableStayed,
 };
 
 /** Ids of the forms the tool can size, in the order in which they are listed everywhere. */

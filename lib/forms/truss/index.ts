@@ -1,8 +1,10 @@
 import { trafficOnDeck, trafficOnInfluence } from '../../actions/index.ts';
 import type { Check, Design, MeasuredLine, SupportReaction, UnitTask } from '../../model/index.ts';
+import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { check, limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
 import { supportPositions, totalLength } from '../common/supports.ts';
+import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { trussData } from './trussData.ts';
 import { trussElevation, trussSectionAt } from './trussDrawing.ts';
@@ -63,14 +65,13 @@ function size(task: UnitTask): Design {
 }
 
 function checkTask(task: UnitTask): void {
-  if (task.spansM.length === 0) throw new RangeError('spansM: expected at least one span, received none');
+  checkUnitTask(task);
   task.spansM.forEach((span, i) => {
     if (!(span >= 20 && span <= 400))
       throw new RangeError(
         `spansM[${i}]: expected 20 to 400 m for a truss, received ${span} m; choose another span or form`,
       );
   });
-  if (!(task.depthM > 0)) throw new RangeError(`depthM: expected more than 0 m, received ${task.depthM}`);
 }
 
 /** Height of the soffit above ground under each span, m. */
@@ -114,12 +115,7 @@ function checksOf(span: TrussSpan): Check[] {
 }
 
 function warningsOf(task: UnitTask, checks: readonly Check[]): string[] {
-  const warnings = checks
-    .filter(({ utilisation }) => utilisation > 1.0001)
-    .map(
-      ({ label, utilisation }) =>
-        `Not met within practical plates: ${label} (${(100 * utilisation).toFixed(0)} %).`,
-    );
+  const warnings = overLimit(checks, 'plates');
   if (task.spansM.length > 1)
     warnings.push('Several spans are sized as simple spans; continuous trusses would be lighter.');
   if (Number.isFinite(task.planRadiusM)) {
