@@ -1,0 +1,122 @@
+import { trafficOnInfluence, type TrafficLoad } from '../../actions/index.ts';
+import { beamTrack, deflectionInfluence } from '../../mechanics/index.ts';
+import type { Check } from '../../model/index.ts';
+import { check } from '../common/checks.ts';
+import { boxData } from './boxData.ts';
+import { boxService } from './boxService.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { Compression } from './boxStress.ts';
+import { mostStrandsPerWeb } from './findTendons.ts';
+import type { BendingUse } from './ultimateBending.ts';
+import type { SizedBox } from './sizeBox.ts';
+
+/** All limit states of a sized box and of its top slab; labels as they are printed. */
+export function boxChecks(model: BoxModel, box: SizedBox): Check[] {
+  const { tendons, compressions, webs } = box;
+  const continuous = model.task.spansM.length > 1;
+  const worst = (pick: (e: number) => number): number => {
+    let at = 0;
+    webs.forEach((_, e) => {
+      if (pick(e) > pick(at)) at = e;
+    });
+    return at;
+  };
+  const crushed = worst((e) => webs[e]!.crushing);
+  const crowded = worst((e) => webs[e]!.crowding);
+  const crushedKN = box.shear.demands[crushed]!.shearKN;
+  const most = mostStrandsPerWeb(model);
+  const service = boxService(model, box);
+  const checks: Check[] = [
+    check(
+      'service-tension',
+      model.standardId === 'lm1'
+        ? 'concrete round the tendons stays compressed in frequent service'
+        : 'tension of the concrete in service',
+      service.needKN,
+      service.forceKN,
+      'kN of tendon force',
+    ),
+    bending('bending-spans', 'bending in the spans', tendons.sag),
+    ...(continuous ? [bending('bending-piers', 'bending over the piers', tendons.hog)] : []),
+    compression('compression-spans', 'compression of the soffit in the spans', compressions.spanSoffit),
+    ...(continuous
+      ? [compression('compression-piers', 'compression of the soffit at the piers', compressions.pierSoffit)]
+      : []),
+    compression('compression-top', 'compression of the top slab', compressions.top),
+    check(
+      'web-struts',
+      'shear and torsion: struts of the outer web',
+      crushedKN,
+      crushedKN / Math.max(1e-9, webs[crushed]!.crushing),
+      'kN',
+    ),
+    check(
+      'web-stirrups',
+      'shear and torsion: stirrups that fit into the outer web',
+      webs[crowded]!.crowding * boxData.stirrupRatioMost.value,
+      boxData.stirrupRatioMost.value,
+      '1',
+    ),
+    check('tendon-room', 'strands that a web has room for', tendons.strandsPerWeb, most, 'strands'),
+    check(
+      'inner-height',
+      'height inside for the forms',
+      boxData.leastInnerM.value,
+      Math.max(0, box.sections.pier.outline.innerM),
+      'm',
+    ),
+    deflection(model, box),
+  ];
+  if (box.launch) {
+    const { compressionMPa } = box.launch;
+    const { strengthShare } = boxData.launching;
+    checks.push(
+      check(
+        'launching',
+        'compression of the concrete while launching',
+        compressionMPa,
+        boxData.compression.transfer * strengthShare * model.concrete.fckMPa,
+        'MPa',
+      ),
+    );
+  }
+  return [...checks, ...model.layout.slab.checks];
+}
+
+function bending(id: string, label: string, use: BendingUse): Check {
+  return check(id, label, use.demandKNm, use.capacityKNm, 'kNm');
+}
+
+function compression(id: string, label: string, { stressMPa, limitMPa }: Compression): Check {
+  return check(id, label, stressMPa, limitMPa, 'MPa');
+}
+
+/** Traffic deflection at the middles of the spans over the limit; the worst span. */
+function deflection(model: BoxModel, box: SizedBox): Check {
+  const { spansM } = model.task;
+  const limit = boxData.deflectionRatio.value;
+  const ei = model.concrete.ecmMPa * 1e3 * box.sections.span.inertiaM4;
+  const checks = spansM.map((spanM, span) =>
+    check('deflection', 'deflection under traffic', midspanDeflection(model, span) / ei, spanM / limit, 'm'),
+  );
+  return checks.reduce((worst, next) => (next.utilisation > worst.utilisation ? next : worst));
+}
+
+/** Deflection of the middle of a span on stiffness 1, m x kNm2. */
+function midspanDeflection(model: BoxModel, span: number): number {
+  const { beam } = model;
+  const station = (beam.supportAt[span]! + beam.supportAt[span + 1]!) >> 1;
+  const line = deflectionInfluence(beam, station);
+  const track = beamTrack(beam);
+  return Math.max(...deflectionLoads(model).map((load) => trafficOnInfluence(load, track, line).max));
+}
+
+/** Characteristic traffic; under AASHTO LRFD 3.6.1.3.2 (from memory) the vehicle, or a quarter of it with the lane load. */
+function deflectionLoads(model: BoxModel): TrafficLoad[] {
+  const { load } = model.traffic;
+  if (model.standardId === 'lm1') return [load];
+  return [
+    { ...load, udlKNm: 0, footwayKNm: 0 },
+    { ...load, vehicleFactor: load.vehicleFactor / 4, footwayKNm: 0 },
+  ];
+}

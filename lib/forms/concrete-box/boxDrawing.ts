@@ -1,0 +1,76 @@
+import type { SectionCut, Shape } from '../../model/index.ts';
+import { constantDepth } from '../common/depthAlong.ts';
+import { deckFace, soffitLine, upright } from '../common/elevation.ts';
+import { deckFurniture } from '../common/furniture.ts';
+import { boxData } from './boxData.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { BoxSection } from './boxSection.ts';
+import type { SizedBox } from './sizeBox.ts';
+
+/** The unit from the side: deck face, bottom slab, edge of the overhang, construction joints and diaphragms faint. */
+export function boxElevation(model: BoxModel, box: SizedBox): Shape[] {
+  const { lengthM, layout, supportsM, task } = model;
+  const along = constantDepth(lengthM, task.depthM);
+  const edge = constantDepth(lengthM, layout.slab.edgeM);
+  const { pierM, endM } = boxData.diaphragm;
+  const last = supportsM.length - 1;
+  const shapes: Shape[] = [
+    deckFace('deck', 'concrete', along),
+    soffitLine('bottom slab', 'concrete', along, box.thicknesses.bottomM),
+    soffitLine('edge of the overhang', 'concrete', edge, 0.02),
+    { ...tendonLine(model, box), faint: true },
+  ];
+  supportsM.forEach((x, j) => {
+    const inner = j > 0 && j < last;
+    const at = j === 0 ? endM / 2 : j === last ? lengthM - endM / 2 : x;
+    shapes.push(upright('diaphragm', 'concrete', along, at, layout.slab.midM, inner ? pierM : endM));
+    // Spans are cast to a joint a fifth of the span past the pier.
+    if (inner)
+      shapes.push(
+        upright(
+          'construction joint',
+          'concrete',
+          along,
+          x + boxData.pierZone.overSpan * task.spansM[j]!,
+          0,
+          0.02,
+        ),
+      );
+  });
+  return shapes;
+}
+
+/** Middle line of the draped tendons. */
+function tendonLine(model: BoxModel, box: SizedBox): Shape {
+  const points = Array.from(model.beam.xM, (x, i): [number, number] => [x, -box.tendons.depthM[i]!]);
+  return { part: 'tendons', material: 'strand', kind: 'line', points, thicknessM: box.tendons.group.ductM };
+}
+
+/** Cross-sections at the middle of the longest span and, on continuous units, over an inner support beside it. */
+export function boxSections(model: BoxModel, box: SizedBox): SectionCut[] {
+  const { spansM } = model.task;
+  const longest = spansM.indexOf(Math.max(...spansM));
+  const cuts = [cut(model, 'midspan', model.supportsM[longest]! + spansM[longest]! / 2, box.sections.span)];
+  if (spansM.length > 1) {
+    const pier = longest > 0 ? longest : 1;
+    cuts.push(cut(model, 'pier', model.supportsM[pier]!, box.sections.pier));
+  }
+  return cuts;
+}
+
+function cut(model: BoxModel, at: string, xM: number, { outline }: BoxSection): SectionCut {
+  return {
+    at,
+    xM,
+    shapes: [
+      {
+        part: 'box',
+        material: 'concrete',
+        kind: 'polygon',
+        points: outline.outer,
+        ...(outline.cells.length > 0 ? { holes: outline.cells } : {}),
+      },
+      ...deckFurniture(model.task.deck),
+    ],
+  };
+}

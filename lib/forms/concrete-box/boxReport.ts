@@ -1,0 +1,109 @@
+import type { SupportReaction } from '../../model/index.ts';
+import { boxBars } from './boxBars.ts';
+import { strandKg } from './boxLines.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { SizedBox } from './sizeBox.ts';
+
+/** Characteristic reactions of the whole deck: own weight with diaphragms, superimposed load, parasitic part of the tendons. */
+export function boxReactions(model: BoxModel, box: SizedBox): SupportReaction[] {
+  const { most } = model.traffic;
+  const gamma = model.standard.unitWeights.concreteKNm3;
+  const parasitic = parasiticReactions(model, box);
+  return model.supportsM.map((_, j) => ({
+    permanentKN:
+      box.own.effects.reactionKN[j]! +
+      model.superimposed.reactionKN[j]! +
+      gamma * box.own.diaphragmM3[j]! +
+      parasitic[j]!,
+    trafficMaxKN: most.reactionMaxKN[j]!,
+    trafficMinKN: most.reactionMinKN[j]!,
+  }));
+}
+
+/** The parasitic moment is straight between supports; its breaks are reactions that add up to nothing. */
+function parasiticReactions(model: BoxModel, box: SizedBox): number[] {
+  const { supportAt, xM } = model.beam;
+  const { parasiticM, forceKN } = box.tendons;
+  const slope = (span: number): number => {
+    const from = supportAt[span];
+    const to = supportAt[span + 1];
+    if (from === undefined || to === undefined) return 0;
+    return (parasiticM[to]! - parasiticM[from]!) / (xM[to]! - xM[from]!);
+  };
+  return supportAt.map((_, j) => forceKN * (slope(j) - slope(j - 1)));
+}
+
+/** Own weight of the governing characteristic moment, 0 to 1. */
+export function ownWeightShare(model: BoxModel, box: SizedBox): number {
+  const { most } = model.traffic;
+  let worst = 0;
+  let share = 0;
+  for (let i = 0; i < most.momentMaxKNm.length; i++) {
+    const own = box.own.effects.momentKNm[i]!;
+    const lasting = own + model.superimposed.momentKNm[i]!;
+    const total = lasting + (lasting < 0 ? most.momentMinKNm[i]! : most.momentMaxKNm[i]!);
+    if (!(Math.abs(total) > worst)) continue;
+    worst = Math.abs(total);
+    share = own / total;
+  }
+  return Math.min(1, Math.max(0, share));
+}
+
+/** Named figures of section, statics and tendons. */
+export function boxFigures(model: BoxModel, box: SizedBox): Record<string, number> {
+  const { layout, beam, task, traffic, lengthM } = model;
+  const { sections, tendons, own, thicknesses } = box;
+  const areaM2 = lengthM * task.deck.widthM;
+  const concreteM3 = own.boxM3 + own.blistersM3 + own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
+  const barsKg = boxBars(model, box).totalKg;
+  const strands = tendons.strandsPerWeb * layout.webs + tendons.straightStrands;
+  const figures: Record<string, number> = {
+    cells: layout.cells,
+    webs: layout.webs,
+    webSpacingM: layout.spacingM,
+    overhangM: layout.overhangM,
+    topSlabMidM: layout.slab.midM,
+    topSlabRootM: layout.slab.rootM,
+    webM: thicknesses.webM,
+    webAtSupportsM: thicknesses.supportWebM,
+    bottomSlabM: thicknesses.bottomM,
+    bottomSlabAtPiersM: thicknesses.pierBottomM,
+    boxInnerHeightM: Math.max(0, sections.pier.outline.innerM),
+    areaM2: sections.span.areaM2,
+    inertiaM4: sections.span.inertiaM4,
+    centroidFromTopM: sections.span.topM,
+    pierAreaM2: sections.pier.areaM2,
+    pierInertiaM4: sections.pier.inertiaM4,
+    enclosedAreaM2: box.shear.enclosedM2,
+    webTrafficShare: box.shear.webShare,
+    tendonCount: tendons.group.tendonsPerWeb * layout.webs,
+    strandsPerTendon: tendons.group.strandsPerTendon,
+    strandCount: strands,
+    tendonForceKN: tendons.forceKN,
+    launchingForceKN: tendons.straightInitialKN,
+    jackingStressMPa: tendons.stress.jackMPa,
+    lastingStressMPa: tendons.stress.lastingMPa,
+    eccentricityMidspanM: Math.max(...tendons.eccentricityM),
+    eccentricityPierM: Math.min(...tendons.eccentricityM),
+    shearDesignKN: box.shear.mostKN,
+    concreteM3M2: concreteM3 / areaM2,
+    barsKgM3: barsKg / concreteM3,
+    strandKgM2: strandKg(model, strands) / areaM2,
+  };
+  for (let span = 0; span < task.spansM.length; span++) {
+    const middle = (beam.supportAt[span]! + beam.supportAt[span + 1]!) >> 1;
+    figures[`span${span + 1}OwnKNm`] = own.effects.momentKNm[middle]!;
+    figures[`span${span + 1}TrafficKNm`] = traffic.most.momentMaxKNm[middle]!;
+  }
+  for (let pier = 1; pier < task.spansM.length; pier++) {
+    const station = beam.supportAt[pier]!;
+    figures[`pier${pier}OwnKNm`] = own.effects.momentKNm[station]!;
+    figures[`pier${pier}TrafficKNm`] = traffic.most.momentMinKNm[station]!;
+    figures[`pier${pier}ParasiticKNm`] = tendons.forceKN * tendons.parasiticM[station]!;
+  }
+  if (box.launch) {
+    figures.launchingHogKNm = box.launch.hogKNm;
+    figures.launchingSagKNm = box.launch.sagKNm;
+  }
+  return figures;
+}

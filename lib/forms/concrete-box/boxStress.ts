@@ -1,0 +1,65 @@
+import { boxData } from './boxData.ts';
+import type { OwnWeight } from './boxLoads.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { Tendons } from './findTendons.ts';
+import type { SectionsAlong } from './sectionsAlong.ts';
+
+/** Greatest compression of the concrete in service over its limit, with the stress, MPa. */
+export interface Compression {
+  readonly use: number;
+  readonly stressMPa: number;
+  readonly limitMPa: number;
+}
+
+/** Compression by place: soffit over piers, soffit in spans, top of the deck. */
+export interface Compressions {
+  readonly pierSoffit: Compression;
+  readonly spanSoffit: Compression;
+  readonly top: Compression;
+}
+
+/**
+ * Stresses of the outer fibres under permanent load, with characteristic traffic, and when the tendons have just been
+ * stressed with only the own weight acting, each against its share of the strength.
+ */
+export function boxCompressions(
+  model: BoxModel,
+  sections: SectionsAlong,
+  own: OwnWeight,
+  tendons: Tendons,
+): Compressions {
+  const { permanent, total, transfer, strengthAtTransfer } = boxData.compression;
+  const fck = model.concrete.fckMPa;
+  const { most } = model.traffic;
+  const limits = {
+    permanent: permanent * fck,
+    total: total * fck,
+    transfer: transfer * strengthAtTransfer * fck,
+  };
+  const nil: Compression = { use: 0, stressMPa: 0, limitMPa: limits.total };
+  const out = { pierSoffit: nil, spanSoffit: nil, top: nil };
+  const note = (place: keyof typeof out, stressKPa: number, limitMPa: number): void => {
+    const use = stressKPa / 1e3 / limitMPa;
+    if (use > out[place].use) out[place] = { use, stressMPa: stressKPa / 1e3, limitMPa };
+  };
+  for (let i = 0; i < sections.areaM2.length; i++) {
+    const area = sections.areaM2[i]!;
+    const lowW = sections.inertiaM4[i]! / sections.lowM[i]!;
+    const topW = sections.inertiaM4[i]! / sections.topM[i]!;
+    // What is left of a unit draped force as a moment about the centroid, sagging positive.
+    const arm = tendons.parasiticM[i]! - tendons.eccentricityM[i]!;
+    const g = own.effects.momentKNm[i]!;
+    const lasting = g + model.superimposed.momentKNm[i]! + tendons.forceKN * arm;
+    const axial = (tendons.forceKN + tendons.straightKN) / area;
+    const fresh = g + tendons.initialKN * arm;
+    const freshAxial = (tendons.initialKN + tendons.straightInitialKN) / area;
+    const soffit = model.pierShare[i]! > 0 ? 'pierSoffit' : 'spanSoffit';
+    note(soffit, axial - lasting / lowW, limits.permanent);
+    note(soffit, axial - (lasting + most.momentMinKNm[i]!) / lowW, limits.total);
+    note(soffit, freshAxial - fresh / lowW, limits.transfer);
+    note('top', axial + lasting / topW, limits.permanent);
+    note('top', axial + (lasting + most.momentMaxKNm[i]!) / topW, limits.total);
+    note('top', freshAxial + fresh / topW, limits.transfer);
+  }
+  return out;
+}

@@ -1,0 +1,66 @@
+import { boxData } from './boxData.ts';
+import type { OwnWeight } from './boxLoads.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { SectionsAlong } from './sectionsAlong.ts';
+import type { TendonGroup } from './tendonGroup.ts';
+
+/** Draped force after all losses that service asks for along a given line of the tendons, kN; Infinity where none will do. */
+export function serviceNeed(
+  model: BoxModel,
+  sections: SectionsAlong,
+  own: OwnWeight,
+  group: TendonGroup,
+  straightKN: number,
+): (eccentricityM: Float64Array, parasiticM: Float64Array) => number {
+  const { service } = model.traffic;
+  const { gradient } = boxData;
+  const spread = boxData.prestressSpread[model.standardId];
+  const tension = boxData.serviceTensionMPa[model.standardId] * 1e3;
+  // Stiffness times free curvature of the gradient with traffic.
+  const warm =
+    (gradient.withTraffic * gradient.expansion1PerK * model.concrete.ecmMPa * 1e3 * sections.span.inertiaM4) /
+    model.task.depthM;
+  const around =
+    model.standardId === 'lm1' ? group.heightM / 2 + boxData.decompressedAroundDuctM.value : Infinity;
+  const n = sections.areaM2.length;
+  const sagging = new Float64Array(n);
+  const hogging = new Float64Array(n);
+  for (let i = 0; i < n; i++) {
+    const lasting = own.effects.momentKNm[i]! + model.superimposed.momentKNm[i]!;
+    const arched = model.archedKNm[i]! * warm;
+    sagging[i] =
+      lasting +
+      service.momentMaxKNm[i]! +
+      Math.max(arched * gradient.topWarmerK, -arched * gradient.topCoolerK);
+    hogging[i] =
+      lasting +
+      service.momentMinKNm[i]! +
+      Math.min(arched * gradient.topWarmerK, -arched * gradient.topCoolerK);
+  }
+  return (eccentricityM, parasiticM) => {
+    let most = 0;
+    for (let i = 0; i < n; i++) {
+      const area = sections.areaM2[i]!;
+      const inertia = sections.inertiaM4[i]!;
+      const e = eccentricityM[i]!;
+      const straight = (spread * straightKN) / area + tension;
+      const down = Math.min(sections.lowM[i]!, e + around) / inertia;
+      const up = Math.min(sections.topM[i]!, around - e) / inertia;
+      const bend = e - parasiticM[i]!;
+      const lowNeed = (sagging[i]! * down - straight) / (spread * (1 / area + bend * down));
+      const highNeed = (-hogging[i]! * up - straight) / (spread * (1 / area - bend * up));
+      most = Math.max(
+        most,
+        forceFor(lowNeed, sagging[i]! * down > straight),
+        forceFor(highNeed, -hogging[i]! * up > straight),
+      );
+    }
+    return most;
+  };
+}
+
+/** A negative force for a fibre in tension means that the tendons make it worse. */
+function forceFor(need: number, inTension: boolean): number {
+  if (!inTension) return 0;
+  return need > 0 ? need : Infinity;
+}

@@ -1,0 +1,85 @@
+import { bendingCapacity, faceBarsM2, type TensionSteel } from './bendingCapacity.ts';
+import { boxData } from './boxData.ts';
+import type { OwnWeight } from './boxLoads.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { SectionsAlong } from './sectionsAlong.ts';
+
+/** Ultimate bending where it is used most. */
+export interface BendingUse {
+  readonly use: number;
+  readonly demandKNm: number;
+  readonly capacityKNm: number;
+  readonly station: number;
+}
+
+/** Tendons as ultimate bending sees them: areas m2, draped force kN, level and parasitic moment of unit force along the deck. */
+export interface UltimateSteel {
+  readonly draped: number;
+  readonly forceKN: number;
+  readonly straight: number;
+  readonly depthM: Float64Array;
+  readonly parasiticM: Float64Array;
+}
+
+/** Ultimate bending at every station, parasitic moment of the tendons included. */
+export function ultimateBending(
+  model: BoxModel,
+  sections: SectionsAlong,
+  own: OwnWeight,
+  steel: UltimateSteel,
+): [sag: BendingUse, hog: BendingUse] {
+  const { uls } = model.standard.factors;
+  const { layout, task } = model;
+  const { most } = model.traffic;
+  const top = { widthM: task.deck.widthM, flangeM: layout.slab.meanM };
+  const bars = [faceBarsM2(sections.span.bottomWidthM), faceBarsM2(task.deck.widthM)] as const;
+  const nil: BendingUse = { use: 0, demandKNm: 0, capacityKNm: 1, station: 0 };
+  let sag = nil;
+  let hog = nil;
+  for (let i = 0; i < sections.areaM2.length; i++) {
+    const lasting =
+      own.effects.momentKNm[i]! * uls.permanent + model.superimposed.momentKNm[i]! * uls.superimposed;
+    const parasitic = uls.prestress * steel.forceKN * steel.parasiticM[i]!;
+    const down = lasting + parasitic + uls.traffic * most.momentMaxKNm[i]!;
+    const up = -(lasting + parasitic + uls.traffic * most.momentMinKNm[i]!);
+    const websM = layout.webs * sections.webM[i]!;
+    const slabs = task.depthM - boxData.ductCoverM.value;
+    const tension = (fromFaceM: number, barM2: number) => mixed(steel, fromFaceM, slabs, barM2, task.depthM);
+    if (down > 0) {
+      const capacityKNm = bendingCapacity(model, tension(steel.depthM[i]!, bars[0]), { ...top, websM });
+      sag = worse(sag, down, capacityKNm, i);
+    }
+    if (up > 0) {
+      const capacityKNm = bendingCapacity(model, tension(task.depthM - steel.depthM[i]!, bars[1]), {
+        widthM: sections.span.bottomWidthM,
+        flangeM: sections.bottomM[i]!,
+        websM,
+      });
+      hog = worse(hog, up, capacityKNm, i);
+    }
+  }
+  return [sag, hog];
+}
+
+function worse(known: BendingUse, demandKNm: number, capacityKNm: number, station: number): BendingUse {
+  const use = capacityKNm > 0 ? demandKNm / capacityKNm : Infinity;
+  return use > known.use ? { use, demandKNm, capacityKNm, station } : known;
+}
+
+/** Draped strands at their level, half of the centred ones near the tension face, bars in that face. */
+function mixed(
+  steel: UltimateSteel,
+  drapedDepthM: number,
+  farM: number,
+  barM2: number,
+  depthM: number,
+): TensionSteel {
+  const far = steel.straight / 2;
+  const strandM2 = steel.draped + far;
+  return {
+    strandM2,
+    strandDepthM: strandM2 > 0 ? (steel.draped * drapedDepthM + far * farM) / strandM2 : depthM,
+    barM2,
+    barDepthM: depthM - boxData.ductCoverM.value / 2,
+  };
+}
