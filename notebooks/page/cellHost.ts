@@ -1,0 +1,247 @@
+import { h } from '../html.ts';
+import type { HtmlChild } from '../html.ts';
+import type { Cell, Graph, Progress, State, Uses, Values } from '../reactive/index.ts';
+import { exchange } from './exchange.ts';
+import type { Frames } from './frames.ts';
+import type { Way } from './refusal.ts';
+import { waysOn } from './refusal.ts';
+import type { StationState } from '../drawing/stationLine.ts';
+
+/** The room a body has on the sheet. */
+export interface Room {
+  readonly widthPx: number;
+}
+
+/** A part that stands as it is, or one drawn anew from the values of the cells whenever they have changed. */
+export type Part<U extends Uses> = HtmlChild | ((values: Values<U>, room: Room) => HtmlChild);
+
+/** A cell of the page. */
+export interface CellSpec<U extends Uses> {
+  /** Its chainage: '3+020'. */
+  readonly station: string;
+  /** What it is, in a word or two, for those who move by headings: 'Arrangements'. */
+  readonly title: string;
+  /** The cells of the graph it shows, by the name its parts know them under. */
+  readonly shows: U;
+  /** Cells that belong to this station although one further up shows them too. */
+  readonly owns?: readonly Cell<unknown>[];
+  readonly body: Part<U>;
+  readonly notes?: Part<U>;
+  /** Body takes the note margin too; notes go below. */
+  readonly wide?: boolean;
+  /** May run on over several printed sheets. */
+  readonly long?: boolean;
+}
+
+/** A failure in words, with what can be done about it. */
+export interface Explained {
+  readonly words: string;
+  readonly ways?: readonly Way[];
+}
+
+/** What a cell needs to know of its page. */
+export interface HostPage {
+  readonly graph: Graph;
+  readonly frames: Frames;
+  readonly explain: (error: unknown, station: string) => Explained;
+  /** The station where a cell of the graph is to be looked for. */
+  readonly homeOf: (cellName: string) => string | undefined;
+  /** The station this one waits for, if any. */
+  readonly waitsFor: (station: string) => string | undefined;
+  /** The state of a station, or the place of something, has changed. */
+  readonly changed: () => void;
+}
+
+export interface CellHost {
+  readonly station: string;
+  readonly title: string;
+  readonly shows: readonly Cell<unknown>[];
+  readonly owns: readonly Cell<unknown>[];
+  readonly element: HTMLElement;
+  /** The label whose middle is the place of the station. */
+  readonly label: HTMLElement;
+  readonly state: () => StationState;
+  /** Begins to show: call once the element stands in the page. */
+  readonly begin: () => void;
+  /** Draws for paper of the given body width, or for the screen again. */
+  readonly setPaper: (room: Room | null) => void;
+  readonly end: () => void;
+}
+
+/** A pause shorter than this is not worth a mark, ms. */
+const MARK_AFTER_MS = 150;
+
+const clock = (date: Date): string =>
+  [date.getHours(), date.getMinutes(), date.getSeconds()]
+    .map((part) => String(part).padStart(2, '0'))
+    .join(':');
+
+/** What a slow run says of itself: 'being worked out: 120 of 480, sizing spans'. */
+const progressWords = (progress: Progress | undefined): string =>
+  progress === undefined
+    ? 'being worked out'
+    : `being worked out: ${progress.done} of ${progress.of}, ${progress.what}`;
+
+/**
+ * A cell on the page: its station in the band, its body, its notes, and its state. It watches the cells it shows, draws
+ * its parts anew at most once a frame and only when their values or its room have changed, and keeps the last good
+ * drawing while it waits and after a failure.
+ */
+export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>): CellHost {
+  const { graph, frames } = page;
+  const { station, title } = spec;
+  const label = h('a', { class: 'station', href: `#${station}` }, station);
+  const body = h('div', { class: 'body' });
+  const notes =
+    spec.notes === undefined ? null : h('aside', { class: 'notes', 'aria-label': `Notes to ${station}` });
+  const failure = h('div', { class: 'said', role: 'status' });
+  const status = h('p', { class: 'status-words', role: 'status' });
+  const element = h(
+    'div',
+    {
+      class: `cell${spec.wide === true ? ' wide' : ''}${spec.long === true ? ' long' : ''}`,
+      id: station,
+      role: 'group',
+      'aria-label': `${station} ${title}`,
+      'data-state': 'pending',
+    },
+    label,
+    failure,
+    body,
+    notes,
+    status,
+  );
+
+  let state: State<Values<U>> = { state: 'pending' };
+  let progress: Progress | undefined;
+  let drawn: { readonly values: Values<U>; readonly widthPx: number } | undefined;
+  let drawnAt: Date | undefined;
+  let isOwed = false;
+  let bodyError: unknown;
+  let paper: Room | null = null;
+  let late: ReturnType<typeof setTimeout> | undefined;
+  let isLate = false;
+  const stops: (() => void)[] = [];
+
+  const stationState = (): StationState => {
+    if (bodyError !== undefined) return 'failed';
+    if (state.state === 'failed') {
+      const home = page.homeOf(state.raisedBy) ?? station;
+      return home === station ? 'failed' : 'held';
+    }
+    return state.state === 'pending' && isLate ? 'pending' : 'done';
+  };
+
+  const drawPart = (target: HTMLElement, part: Part<U>, values: Values<U>, room: Room): boolean => {
+    if (typeof part !== 'function') return true;
+    return exchange(target, h('div', {}, part(values, room)));
+  };
+
+  const draw = (): void => {
+    const widthPx = paper?.widthPx ?? body.clientWidth;
+    const values = 'value' in state ? state.value : undefined;
+    if (values === undefined || widthPx === 0) return;
+    if (!isOwed && drawn?.values === values && drawn.widthPx === widthPx) return;
+    const room = { widthPx };
+    drawn = { values, widthPx };
+    drawnAt = new Date();
+    try {
+      const whole = drawPart(body, spec.body, values, room);
+      const noted = notes === null || drawPart(notes, spec.notes, values, room);
+      isOwed = !whole || !noted;
+      bodyError = undefined;
+    } catch (error) {
+      // A drawing that cannot be made is a failure of this cell like any other; the last one stays.
+      bodyError = error;
+      isOwed = false;
+    }
+  };
+
+  const sayFailure = (): void => {
+    const error = bodyError ?? (state.state === 'failed' ? state.error : undefined);
+    const { words, ways = [] } = page.explain(error, station);
+    failure.replaceChildren(h('p', { class: 'failure' }, words), ...waysOn(ways));
+  };
+
+  const say = (now: StationState): void => {
+    if (now === 'failed') sayFailure();
+    else failure.replaceChildren();
+    const since = drawn === undefined || drawnAt === undefined ? '' : `; drawn as of ${clock(drawnAt)}`;
+    const other = now === 'pending' || now === 'held' ? page.waitsFor(station) : undefined;
+    const words =
+      now === 'held'
+        ? `held at the last good figures${other === undefined ? '' : `; waits for ${other}`}`
+        : now === 'pending'
+          ? `${other === undefined || progress !== undefined ? progressWords(progress) : `waits for ${other}`}${since}`
+          : '';
+    if (status.textContent !== words) status.textContent = words;
+  };
+
+  const update = (): void => {
+    draw();
+    const now = stationState();
+    element.dataset['state'] = now;
+    element.classList.toggle('pending', now === 'pending');
+    element.classList.toggle('held', now === 'held');
+    element.classList.toggle('failed', now === 'failed');
+    element.setAttribute('aria-busy', String(now === 'pending'));
+    say(now);
+    page.changed();
+  };
+  const updateSoon = (): void => frames.request(update);
+
+  const show = (next: State<Values<U>>): void => {
+    state = next;
+    if (next.state === 'pending') {
+      late ??= setTimeout(() => {
+        isLate = true;
+        updateSoon();
+      }, MARK_AFTER_MS);
+    } else {
+      clearTimeout(late);
+      late = undefined;
+      isLate = false;
+      progress = undefined;
+    }
+    updateSoon();
+  };
+
+  body.addEventListener('focusout', () => {
+    if (isOwed) updateSoon();
+  });
+
+  return {
+    station,
+    title,
+    shows: Object.values(spec.shows),
+    owns: spec.owns ?? [],
+    element,
+    label,
+    state: stationState,
+    begin() {
+      const standing = (part: Part<U>): HtmlChild => (typeof part === 'function' ? null : part);
+      body.append(...h('div', {}, standing(spec.body)).childNodes);
+      notes?.append(...h('div', {}, standing(spec.notes)).childNodes);
+      stops.push(graph.view(spec.shows, show));
+      for (const cell of Object.values(spec.shows)) {
+        if (cell.kind !== 'slow') continue;
+        const watch = (one: State<unknown>): void => {
+          progress = one.state === 'pending' ? one.progress : undefined;
+          updateSoon();
+        };
+        stops.push(graph.watch(cell, watch));
+      }
+      const watcher = new ResizeObserver(updateSoon);
+      watcher.observe(body);
+      stops.push(() => watcher.disconnect());
+    },
+    setPaper(room) {
+      paper = room;
+      updateSoon();
+    },
+    end() {
+      clearTimeout(late);
+      for (const stop of stops) stop();
+    },
+  };
+}

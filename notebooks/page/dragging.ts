@@ -1,0 +1,75 @@
+/** How far the pointer has come since it went down, px, and which keys are held. */
+export interface DragAt {
+  readonly dx: number;
+  readonly dy: number;
+  readonly shift: boolean;
+  readonly alt: boolean;
+}
+
+export interface Drag {
+  /** The pointer went down; false leaves it to the browser. */
+  readonly may?: (event: PointerEvent) => boolean;
+  /** It has moved far enough to be a drag. */
+  readonly start?: () => void;
+  readonly move: (at: DragAt) => void;
+  /** Released: what was moved stays. */
+  readonly end: () => void;
+  /** Escape, or the pointer was taken away: back to where it was. */
+  readonly cancel: () => void;
+  /** Pressed and released in place. */
+  readonly tap?: () => void;
+}
+
+/** Movement that still counts as a press in place, px. */
+const SLACK_PX = 3;
+
+/**
+ * Makes an element draggable with mouse or pen. The drag lives on the document, so that it goes on when a new drawing
+ * takes the place of the element under the pointer. Touch is left to the browser, which scrolls with it.
+ */
+export function draggable(element: Element, { may, start, move, end, cancel, tap }: Drag): void {
+  element.addEventListener('pointerdown', (event) => {
+    const down = event as PointerEvent;
+    if (down.button !== 0 || !down.isPrimary || down.pointerType === 'touch') return;
+    if (may?.(down) === false) return;
+    const page = element.ownerDocument;
+    const listening = new AbortController();
+    const { signal } = listening;
+    let isDrag = false;
+
+    const stop = (): void => {
+      listening.abort();
+      page.documentElement.classList.remove('dragging');
+    };
+    const onMove = ({ clientX, clientY, shiftKey, altKey }: PointerEvent): void => {
+      const at = { dx: clientX - down.clientX, dy: clientY - down.clientY, shift: shiftKey, alt: altKey };
+      if (!isDrag && Math.hypot(at.dx, at.dy) <= SLACK_PX) return;
+      if (!isDrag) {
+        isDrag = true;
+        page.documentElement.classList.add('dragging');
+        page.getSelection()?.removeAllRanges();
+        start?.();
+      }
+      move(at);
+    };
+    const onUp = (): void => {
+      stop();
+      if (isDrag) end();
+      else tap?.();
+    };
+    const onCancel = (): void => {
+      stop();
+      if (isDrag) cancel();
+    };
+    const onKey = (pressed: KeyboardEvent): void => {
+      if (pressed.key !== 'Escape' || !isDrag) return;
+      pressed.preventDefault();
+      pressed.stopPropagation();
+      onCancel();
+    };
+    page.addEventListener('pointermove', onMove, { signal });
+    page.addEventListener('pointerup', onUp, { signal });
+    page.addEventListener('pointercancel', onCancel, { signal });
+    page.addEventListener('keydown', onKey, { signal, capture: true });
+  });
+}

@@ -1,0 +1,107 @@
+import type { Problem } from '../../lib/index.ts';
+import type { Graph } from '../reactive/index.ts';
+import type { ChoiceSpec } from './choiceInput.ts';
+import { choiceInput } from './choiceInput.ts';
+import type { FigureSpec, Origin } from './figureInput.ts';
+import { figureInput } from './figureInput.ts';
+import type { Figure } from './figureText.ts';
+import type { Path } from './place.ts';
+import { getAt, isWithin, putAt } from './place.ts';
+import type { Way } from './refusal.ts';
+import type { StudyStore } from './store.ts';
+
+type Bound = 'value' | 'input' | 'change' | 'key' | 'origin';
+
+/** Where the origin of a field is read from; every field counts as typed unless it says otherwise. */
+export interface FieldOptions {
+  /** Whether the field still holds a preset that is to be confirmed. */
+  readonly isPreset?: (draft: unknown) => boolean;
+}
+
+export interface Fields {
+  /** A figure of the study at a path, in step with it both ways. */
+  readonly figure: (path: Path, spec: Omit<FigureSpec, Bound> & FieldOptions) => HTMLElement;
+  /** A choice of the study at a path, in step with it both ways. */
+  readonly choice: <T extends string>(
+    path: Path,
+    spec: Omit<ChoiceSpec<T>, Bound> & FieldOptions,
+  ) => HTMLElement;
+  /** Takes all fields out of step. */
+  readonly end: () => void;
+}
+
+/**
+ * Fields tied to a store, for parts of a page that stand (a body that is not drawn anew): they show the draft, change
+ * it as one step of undo a go, and say beside themselves what is wrong with it.
+ * @param say a problem in words
+ */
+export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem) => string): Fields {
+  const stops: (() => void)[] = [];
+
+  interface Shown {
+    readonly set: (value: never, origin: Origin) => void;
+    readonly refuse: (words: string | null, ways?: readonly Way[]) => void;
+  }
+  const tie = (path: Path, shown: Shown, { isPreset }: FieldOptions): void => {
+    let wrong: readonly Problem[] = [];
+    const undo: Way = { words: 'Undo', take: () => store.undo() };
+    stops.push(
+      graph.view({ draft: store.draft, problems: store.problems }, (state) => {
+        if (state.state !== 'ready') return;
+        const { draft, problems } = state.value;
+        // The list this field stands in may have been shortened under it.
+        let value: unknown;
+        try {
+          value = getAt(draft, path);
+        } catch {
+          return;
+        }
+        shown.set(value as never, isPreset?.(draft) === true ? 'preset' : 'typed');
+        const mine = problems.filter((problem) => isWithin(problem.path, path));
+        if (mine.length === 0 && wrong.length === 0) return;
+        wrong = mine;
+        const words = mine.map(say).join(' ');
+        shown.refuse(mine.length === 0 ? null : `${words} The last valid study is kept.`, [undo]);
+      }),
+    );
+  };
+  const start = (path: Path): unknown => {
+    const state = graph.state(store.draft);
+    return getAt('value' in state ? state.value : undefined, path);
+  };
+  const put =
+    (path: Path, what: string) =>
+    (value: number | string): void =>
+      store.edit((study) => putAt(study, path, value), { coalesce: path.join('.'), what });
+
+  return {
+    figure(path, { isPreset, ...spec }) {
+      const figure = figureInput({
+        ...spec,
+        value: start(path) as Figure,
+        key: path.join('.'),
+        input: put(path, spec.label),
+        change: store.endStep,
+      });
+      tie(path, figure, isPreset === undefined ? {} : { isPreset });
+      return figure.element;
+    },
+    choice(path, { isPreset, ...spec }) {
+      const edit = put(path, spec.label);
+      const choice = choiceInput({
+        ...spec,
+        value: start(path) as (typeof spec.choices)[number]['value'],
+        key: path.join('.'),
+        change(value) {
+          edit(value);
+          store.endStep();
+        },
+      });
+      tie(path, choice, isPreset === undefined ? {} : { isPreset });
+      return choice.element;
+    },
+    end() {
+      for (const stop of stops.splice(0)) stop();
+    },
+  };
+}

@@ -1,0 +1,317 @@
+import { toDom } from '../drawing/toDom.ts';
+import { h } from '../html.ts';
+import { draggable } from './dragging.ts';
+import { figureScale, STEP_PX } from './figureScale.ts';
+import type { ScaleMark } from './figureScale.ts';
+import type { Figure, FigureRules } from './figureText.ts';
+import { judgeFigure, movedFigure, readFigure, smallestStep, writeFigure } from './figureText.ts';
+import { nextId } from './nextId.ts';
+import type { Way } from './refusal.ts';
+import { refusalSlot } from './refusal.ts';
+
+/** Where a figure comes from: typed here, or preset and to be confirmed. */
+export type Origin = 'typed' | 'preset';
+
+/** A figure in a sentence or table. Limits, places and steps are in the unit shown. */
+export interface FigureSpec extends FigureRules {
+  /** What it is, for those who do not see the sentence: 'clear opening'. */
+  readonly label: string;
+  /** In the unit of the study. */
+  readonly value: Figure;
+  readonly origin?: Origin;
+  /** The shown figure is the value times this, e.g. 100 for a ratio shown in per cent; 1 unless given. */
+  readonly per?: number;
+  /** Worth of one step of the arrow keys and of the scale; 1 unless given. */
+  readonly step?: number;
+  /** Where stepping starts from when the value is unknown; the lower limit or 0 unless given. */
+  readonly from?: number;
+  /** Tells a field from others of its cell across drawings of it anew; the label unless given. */
+  readonly key?: string;
+  /** Values, in the unit shown, at which something happens; asked once a drag. */
+  readonly marks?: () => readonly ScaleMark[];
+  /** Every new value of a drag, of arrow keys, or of typing that pauses. */
+  readonly input?: (value: Figure) => void;
+  /** Once at the end of each go that was told by `input`, also when it came back to where it began. */
+  readonly change?: (value: Figure) => void;
+  /** Enter on a preset that was left as it is. */
+  readonly confirm?: () => void;
+}
+
+export interface FigureInput {
+  readonly element: HTMLElement;
+  /** Shows another value; text that is being typed is left alone. */
+  readonly set: (value: Figure, origin?: Origin) => void;
+  /** Shows what is wrong with the value beside it, or takes it away. */
+  readonly refuse: (words: string | null, ways?: readonly Way[]) => void;
+}
+
+/** Pause after which a typed figure counts although nobody has pressed Enter, ms. */
+const PAUSE_MS = 250;
+
+const stepKeys: Readonly<Record<string, number>> = { ArrowUp: 1, ArrowDown: -1, PageUp: 10, PageDown: -10 };
+
+/**
+ * A figure to be changed in place: dragged sideways, stepped with the arrow keys (Shift ten steps, Alt a tenth), or
+ * typed. Enter keeps, Escape goes back. A value against the limits is refused with a way on; the last good one is kept.
+ */
+export function figureInput(spec: FigureSpec): FigureInput {
+  const { label, unit, unknown, places, per = 1, step = 1 } = spec;
+  const id = nextId('figure');
+  const toShown = (value: Figure): Figure =>
+    value === 'unknown' ? value : Number((value * per).toPrecision(12));
+  const toValue = (shown: Figure): Figure =>
+    shown === 'unknown' ? shown : Number((shown / per).toPrecision(12));
+
+  let shown = toShown(spec.value);
+  let origin = spec.origin ?? 'typed';
+  /** The value when the present go at it began, to compare with and to go back to. */
+  let before = shown;
+  let originBefore = origin;
+  /** Whether `input` has told anything since then. */
+  let isTold = false;
+  let isTyping = false;
+  let isRefused = false;
+  let pause: ReturnType<typeof setTimeout> | undefined;
+
+  const field = h('span', {
+    class: 'fig',
+    role: 'spinbutton',
+    tabindex: 0,
+    contenteditable: 'plaintext-only',
+    inputmode: 'decimal',
+    spellcheck: 'false',
+    'aria-label': unit === undefined ? label : `${label}, ${unit}`,
+    'aria-description': `Arrow keys step ${step}, with Shift ${step * 10}, with Alt ${step / 10}; Enter keeps, Escape goes back${unknown === undefined ? '' : '; ? for not known'}`,
+    ...(spec.min && { 'aria-valuemin': spec.min.value }),
+    ...(spec.max && { 'aria-valuemax': spec.max.value }),
+  });
+  const below = h('span', { class: 'below' });
+  const refusal = refusalSlot(`${id}-refusal`);
+  const element = h('span', { class: 'entry', 'data-key': spec.key ?? label }, field, below, refusal.element);
+
+  const dress = (): void => {
+    const kind = shown === 'unknown' ? 'unknown' : origin;
+    field.className = `fig ${kind}${isRefused ? ' refused' : ''}`;
+    if (shown === 'unknown') field.removeAttribute('aria-valuenow');
+    else field.setAttribute('aria-valuenow', String(shown));
+    const words = writeFigure(shown, spec);
+    field.setAttribute(
+      'aria-valuetext',
+      unit === undefined || shown === 'unknown' ? words : `${words} ${unit}`,
+    );
+    if (isRefused) {
+      field.setAttribute('aria-invalid', 'true');
+      field.setAttribute('aria-errormessage', refusal.element.id);
+    } else {
+      field.removeAttribute('aria-invalid');
+      field.removeAttribute('aria-errormessage');
+    }
+  };
+  const write = (): void => {
+    const words = writeFigure(shown, spec);
+    if (field.textContent !== words) {
+      field.textContent = words;
+      if (hasFocus()) selectAll();
+    }
+    dress();
+  };
+  const hasFocus = (): boolean => field.ownerDocument.activeElement === field;
+  const selectAll = (): void => field.ownerDocument.getSelection()?.selectAllChildren(field);
+
+  const unrefuse = (): void => {
+    isRefused = false;
+    refusal.clear();
+  };
+  const stopTyping = (): void => {
+    isTyping = false;
+    clearTimeout(pause);
+  };
+
+  /** A new value that is allowed: shown and told, not yet kept. */
+  const move = (next: Figure): void => {
+    if (next === shown) return;
+    shown = next;
+    if (next !== 'unknown') origin = 'typed';
+    isTold = true;
+    spec.input?.(toValue(shown));
+  };
+  /** Ends the go at it. */
+  const keep = (): void => {
+    hideScale();
+    before = shown;
+    originBefore = origin;
+    if (!isTold) return;
+    isTold = false;
+    spec.change?.(toValue(shown));
+  };
+  const goBack = (): void => {
+    stopTyping();
+    unrefuse();
+    move(before);
+    origin = originBefore;
+    keep();
+    write();
+  };
+
+  const showScale = (stepNow: number): void => {
+    if (shown === 'unknown') return;
+    const start = before === 'unknown' ? shown : before;
+    const marks = spec.marks?.() ?? [];
+    const piece = figureScale({ before: start, now: shown, step: stepNow, rules: spec, marks });
+    below.replaceChildren(toDom(piece, field.ownerDocument));
+    element.classList.add('held');
+  };
+  const hideScale = (): void => {
+    below.replaceChildren();
+    element.classList.remove('held');
+    if (unknown !== undefined && shown !== 'unknown' && hasFocus()) offerUnknown();
+  };
+  const offerUnknown = (): void => {
+    const choose = h('button', { type: 'button', class: 'action', tabindex: -1 }, unknown);
+    choose.addEventListener('pointerdown', (event) => {
+      event.preventDefault();
+      stopTyping();
+      unrefuse();
+      move('unknown');
+      write();
+      keep();
+    });
+    below.replaceChildren(choose);
+  };
+
+  const start = (): number => (shown === 'unknown' ? (spec.from ?? spec.min?.value ?? 0) : shown);
+  const stepWith = (shift: boolean, alt: boolean): number =>
+    Math.max(smallestStep(places), step * (shift ? 10 : alt ? 0.1 : 1));
+
+  /** What is typed, judged: the value, or the refusal shown with its ways on. */
+  const takeTyped = (isFinal: boolean): void => {
+    const text = field.textContent;
+    const read = readFigure(text, spec);
+    const wrong = read.ok ? judgeFigure(read.value, spec) : { why: read.why, nearest: null };
+    if (read.ok && wrong === null) {
+      unrefuse();
+      move(read.value);
+      if (!isFinal) dress();
+      return;
+    }
+    if (!isFinal || wrong === null) return;
+    // What was given on the way to the refused text is taken back: the last good value is the one before.
+    move(before);
+    isRefused = true;
+    const good = writeFigure(before, spec);
+    const { nearest } = wrong;
+    const take = (value: Figure) => (): void => {
+      stopTyping();
+      unrefuse();
+      move(value);
+      write();
+      keep();
+      field.focus();
+    };
+    refusal.say(`Refused: ${wrong.why}. The last good value, ${good}, is kept.`, [
+      ...(nearest === null ? [] : [{ words: `Take ${writeFigure(nearest, spec)}`, take: take(nearest) }]),
+      { words: `Back to ${good}`, take: take(before) },
+    ]);
+    dress();
+  };
+  const finish = (): void => {
+    if (isTyping) {
+      stopTyping();
+      takeTyped(true);
+    }
+    keep();
+    if (!isRefused) write();
+  };
+
+  field.addEventListener('focus', () => {
+    selectAll();
+    hideScale();
+  });
+  field.addEventListener('blur', () => {
+    finish();
+    below.replaceChildren();
+  });
+  field.addEventListener('input', () => {
+    isTyping = true;
+    clearTimeout(pause);
+    pause = setTimeout(() => takeTyped(false), PAUSE_MS);
+  });
+  field.addEventListener('keydown', (event) => {
+    const { key, shiftKey, altKey } = event;
+    const direction = stepKeys[key];
+    if (key === 'Enter') {
+      const untouched = !isTyping && shown === before;
+      finish();
+      if (untouched && origin === 'preset') spec.confirm?.();
+      if (!isRefused) selectAll();
+    } else if (key === 'Escape') {
+      goBack();
+      selectAll();
+    } else if (direction !== undefined) {
+      if (isTyping) {
+        stopTyping();
+        takeTyped(false);
+      }
+      unrefuse();
+      const by = stepWith(shiftKey, altKey);
+      move(movedFigure(start(), direction * by, spec));
+      write();
+      showScale(by);
+    } else return;
+    event.preventDefault();
+    event.stopPropagation();
+  });
+
+  let anchor = { value: 0, dx: 0, by: step };
+  draggable(field, {
+    may: () => !isTyping,
+    start() {
+      unrefuse();
+      anchor = { value: start(), dx: 0, by: step };
+      field.focus({ preventScroll: true });
+    },
+    move({ dx, shift, alt }) {
+      const by = stepWith(shift, alt);
+      if (by !== anchor.by) anchor = { value: start(), dx, by };
+      const fine = Math.max(smallestStep(places), by / 10);
+      const moved = Math.round((((dx - anchor.dx) / STEP_PX) * by) / fine) * fine;
+      move(movedFigure(anchor.value, moved, spec));
+      write();
+      showScale(by);
+    },
+    end() {
+      keep();
+      write();
+    },
+    cancel: goBack,
+    tap() {
+      if (!hasFocus()) field.focus();
+    },
+  });
+  // A press takes the focus on release: until then it may become a drag.
+  field.addEventListener('mousedown', (event) => {
+    if (!isTyping && !hasFocus()) event.preventDefault();
+  });
+
+  write();
+  return {
+    element,
+    set(value, from = origin) {
+      const next = toShown(value);
+      if (isTyping || (next === shown && from === origin)) return;
+      if (next !== shown) unrefuse();
+      shown = next;
+      origin = from;
+      if (!isTold) [before, originBefore] = [shown, origin];
+      write();
+    },
+    refuse(words, ways = []) {
+      if (words === null) unrefuse();
+      else {
+        isRefused = true;
+        refusal.say(words, ways);
+      }
+      dress();
+    },
+  };
+}

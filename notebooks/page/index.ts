@@ -1,0 +1,33 @@
+export { sheet, type BarSpec, type HeadSpec, type PageSpec, type Sheet, type SheetOptions } from './sheet.ts';
+export type { CellHost, CellSpec, Explained, Part, Room } from './cellHost.ts';
+export type { LineSection } from './stationLines.ts';
+export {
+  studyStore,
+  type EditWords,
+  type Head,
+  type History,
+  type Slices,
+  type StudyStore,
+} from './store.ts';
+export { fieldsOf, type FieldOptions, type Fields } from './fields.ts';
+export { figureInput, type FigureInput, type FigureSpec, type Origin } from './figureInput.ts';
+export type { Figure, FigureRules, Limit } from './figureText.ts';
+export type { ScaleMark } from './figureScale.ts';
+export { choiceInput, type Choice, type ChoiceInput, type ChoiceSpec } from './choiceInput.ts';
+export { draggable, type Drag, type DragAt } from './dragging.ts';
+export { waysOn, type Way } from './refusal.ts';
+export { getAt, isWithin, putAt, type Path } from './place.ts';
+export { share } from './share.ts';
+export {
+  fileName,
+  savedWords,
+  studyShelf,
+  type LoadedStudy,
+  type StoredStudy,
+  type StudyCupboard,
+  type StudyEntry,
+  type StudyFormat,
+  type StudyShelf,
+} from './saving.ts';
+export { deviceCupboard } from './cupboard.ts';
+export { openFile, saveFile, textOf } from './files.ts';

@@ -1,0 +1,35 @@
+import { h } from '../html.ts';
+
+/** A way on from a refusal or a failure: what it is called and what it does. */
+export interface Way {
+  readonly words: string;
+  readonly take: () => void;
+}
+
+/** Ways on, as actions in a row. */
+export function waysOn(ways: readonly Way[]): HTMLElement[] {
+  return ways.map(({ words, take }) => h('button', { type: 'button', class: 'action', click: take }, words));
+}
+
+export interface RefusalSlot {
+  readonly element: HTMLElement;
+  readonly say: (words: string, ways: readonly Way[]) => void;
+  readonly clear: () => void;
+}
+
+/** The place below a field's line where a refusal is said; it takes no room while there is none. */
+export function refusalSlot(id: string): RefusalSlot {
+  const element = h('span', { class: 'refusal', id, role: 'status' });
+  return {
+    element,
+    say(words, ways) {
+      element.replaceChildren(
+        h('span', { class: 'why' }, words),
+        ...(ways.length === 0 ? [] : [h('span', { class: 'ways' }, waysOn(ways))]),
+      );
+    },
+    clear() {
+      element.replaceChildren();
+    },
+  };
+}

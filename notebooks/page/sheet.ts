@@ -1,0 +1,213 @@
+import { h } from '../html.ts';
+import type { HtmlChild } from '../html.ts';
+import type { Graph, State, Uses, Values } from '../reactive/index.ts';
+import type { CellHost, CellSpec, Explained } from './cellHost.ts';
+import { cellHost } from './cellHost.ts';
+import { exchange } from './exchange.ts';
+import { frames } from './frames.ts';
+import type { LineSection } from './stationLines.ts';
+import { stationLines } from './stationLines.ts';
+import type { Station } from './ties.ts';
+import { homeOf, tiesOf } from './ties.ts';
+
+/** The line above the title: names of the pages at the left, what can be done at the right. */
+export interface BarSpec {
+  readonly pages: readonly { readonly words: string; readonly href: string; readonly here?: boolean }[];
+  /** E.g. 'saved 14:02 on this device' and actions. */
+  readonly tools?: HtmlChild;
+}
+
+/** What stands above the sections: the page opens with its answer, then one thing to do. */
+export interface HeadSpec {
+  readonly title: HtmlChild;
+  readonly answer?: HtmlChild;
+  /** After the word Next. */
+  readonly next?: HtmlChild;
+  /** Title block: rows of name and value. */
+  readonly block?: readonly (readonly [name: string, value: HtmlChild])[];
+}
+
+export interface PageSpec {
+  readonly bar?: BarSpec;
+  readonly head: HeadSpec;
+  readonly sections: readonly LineSection[];
+  /** Beside the key line; absent leaves the usual hint, false says nothing. */
+  readonly hint?: HtmlChild;
+}
+
+export interface SheetOptions {
+  /** Puts a failure in words; the message of the error unless given. */
+  readonly explain?: (error: unknown, station: string) => Explained;
+}
+
+/** The page of a notebook: builders for its parts, all tied to one graph. */
+export interface Sheet {
+  /** A run of text or a part of a page that follows the values of cells; for titles, answers, findings. */
+  readonly live: <const U extends Uses>(uses: U, show: (values: Values<U>) => HtmlChild) => HTMLElement;
+  readonly cell: <const U extends Uses>(spec: CellSpec<U>) => CellHost;
+  readonly section: (
+    number: number,
+    title: string,
+    finding: HtmlChild,
+    cells: readonly CellHost[],
+  ) => LineSection;
+  /** Puts the page together under `root` and begins to show it. */
+  readonly mount: (root: Element, spec: PageSpec) => HTMLElement;
+  /** Draws now what waits for the next frame. */
+  readonly flush: () => void;
+  /** Stops watching the graph; the page stays as it is. */
+  readonly end: () => void;
+}
+
+/** Body and wide body of the printed sheet, px: 980 px are 259 m at 1:1000. */
+const PAPER = { body: 980, wide: 1224 } as const;
+
+const usualHint = 'Point at a cell: solid spans come from what it uses, dashed ones go to what uses it.';
+
+const messageOf = (error: unknown): Explained => ({
+  words: error instanceof Error ? error.message : String(error),
+});
+
+const bar = ({ pages, tools }: BarSpec): HTMLElement =>
+  h(
+    'nav',
+    { 'aria-label': 'Pages' },
+    h(
+      'div',
+      { class: 'bar' },
+      pages.map(({ words, href, here }) => h('a', { href, 'aria-current': here === true && 'page' }, words)),
+      h('span', { class: 'apart' }),
+      tools,
+    ),
+  );
+
+const titleBlock = (rows: NonNullable<HeadSpec['block']>): HTMLElement =>
+  h(
+    'table',
+    { class: 'block', 'aria-label': 'Title block' },
+    h(
+      'tbody',
+      {},
+      rows.map(([name, value]) => h('tr', {}, h('th', { scope: 'row' }, name), h('td', {}, value))),
+    ),
+  );
+
+const head = ({ title, answer, next, block }: HeadSpec): HTMLElement =>
+  h(
+    'header',
+    {},
+    h('h1', {}, title),
+    answer !== undefined && h('p', { class: 'answer' }, answer),
+    next !== undefined && h('p', { class: 'next' }, h('b', {}, 'Next:'), ' ', next),
+    block !== undefined && titleBlock(block),
+  );
+
+/**
+ * A page on which cells of a graph are shown. Build cells and sections in page order, then mount them once.
+ * Sections get the ids 's1', 's2' ..., cells the id of their station.
+ */
+export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}): Sheet {
+  const queue = frames((run) => requestAnimationFrame(run));
+  const element = h('main', { class: 'sheet' });
+  const stops: (() => void)[] = [];
+  let sections: readonly LineSection[] = [];
+  let known: readonly Station[] = [];
+
+  const hosts = (): CellHost[] => sections.flatMap((section) => section.hosts);
+  const ties = () => tiesOf(known, (cell) => graph.uses(cell));
+  const lines = stationLines(element, () => sections, ties, queue);
+
+  const page = {
+    graph,
+    frames: queue,
+    explain,
+    homeOf: (cellName: string) => homeOf(cellName, known, (cell) => graph.uses(cell)),
+    waitsFor(station: string) {
+      const above = new Set(ties().get(station)?.uses);
+      return hosts().find((host) => above.has(host.station) && host.state() !== 'done')?.station;
+    },
+    changed: lines.redraw,
+  };
+
+  const onPaper = (isPaper: boolean) => (): void => {
+    for (const host of hosts()) {
+      const wide = host.element.classList.contains('wide');
+      host.setPaper(isPaper ? { widthPx: wide ? PAPER.wide : PAPER.body } : null);
+    }
+    queue.flush();
+  };
+
+  return {
+    live(uses, show) {
+      const part = h('span', { class: 'live' });
+      let state: State<Values<typeof uses>> = { state: 'pending' };
+      let shown: unknown;
+      const draw = (): void => {
+        part.classList.toggle('pending', state.state !== 'ready');
+        if (!('value' in state) || state.value === shown) return;
+        shown = exchange(part, h('span', {}, show(state.value))) ? state.value : undefined;
+      };
+      part.addEventListener('focusout', () => queue.request(draw));
+      stops.push(
+        graph.view(uses, (next) => {
+          state = next;
+          queue.request(draw);
+        }),
+      );
+      return part;
+    },
+
+    cell: (spec) => cellHost(page, spec),
+
+    section(number, title, finding, cells) {
+      const post = h('span', { class: 'post' }, number);
+      const name = h(
+        'span',
+        { class: 'name' },
+        title,
+        finding !== null && finding !== undefined && h('span', { class: 'finding' }, finding),
+      );
+      const section = h(
+        'section',
+        { class: 'section', id: `s${number}`, 'aria-labelledby': `s${number}-title` },
+        h('h2', { id: `s${number}-title` }, post, ' ', name),
+        cells.map((host) => host.element),
+      );
+      return { number, title, element: section, post, hosts: cells };
+    },
+
+    mount(root, spec) {
+      ({ sections } = spec);
+      known = hosts().map(({ station, shows, owns }) => ({ name: station, shows, owns }));
+      const { hint = usualHint } = spec;
+      element.append(
+        ...(spec.bar === undefined ? [] : [bar(spec.bar)]),
+        head(spec.head),
+        h('div', { class: 'key' }, hint !== false && h('p', { class: 'hint' }, hint), lines.flat),
+        ...sections.map((section) => section.element),
+        lines.upright,
+      );
+      root.append(element);
+      for (const host of hosts()) {
+        host.begin();
+        stops.push(host.end);
+      }
+      const before = onPaper(true);
+      const after = onPaper(false);
+      window.addEventListener('beforeprint', before);
+      window.addEventListener('afterprint', after);
+      stops.push(lines.end, () => {
+        window.removeEventListener('beforeprint', before);
+        window.removeEventListener('afterprint', after);
+      });
+      lines.redraw();
+      return element;
+    },
+
+    flush: queue.flush,
+
+    end() {
+      for (const stop of stops.splice(0)) stop();
+    },
+  };
+}

@@ -1,0 +1,170 @@
+import { keyLine } from '../drawing/keyLine.ts';
+import { stationLine } from '../drawing/stationLine.ts';
+import type { StationMark } from '../drawing/stationLine.ts';
+import { toDom } from '../drawing/toDom.ts';
+import { h } from '../html.ts';
+import type { CellHost } from './cellHost.ts';
+import type { Frames } from './frames.ts';
+import type { Ties } from './ties.ts';
+
+/** A section as the lines see it. */
+export interface LineSection {
+  readonly number: number;
+  readonly title: string;
+  readonly element: HTMLElement;
+  /** The number beside the line. */
+  readonly post: HTMLElement;
+  readonly hosts: readonly CellHost[];
+}
+
+export interface StationLines {
+  /** The line beside the sheet, to be laid over its band. */
+  readonly upright: HTMLElement;
+  /** The line under the title. */
+  readonly flat: HTMLElement;
+  /** Draws both anew in the next frame. */
+  readonly redraw: () => void;
+  readonly end: () => void;
+}
+
+const pixels = (element: Element, property: string): number =>
+  parseFloat(getComputedStyle(element).getPropertyValue(property));
+
+/** Middle of an element, px down from the top of the sheet. */
+const middleOf = (element: Element, sheet: Element): number => {
+  const { top, height } = element.getBoundingClientRect();
+  return top + height / 2 - sheet.getBoundingClientRect().top;
+};
+
+/**
+ * Both lines of a page. Pointing at a cell, or having the focus in it, draws the spans to what it uses and to what
+ * uses it on both. `ties` is asked anew each time something else is pointed at.
+ */
+export function stationLines(
+  sheet: HTMLElement,
+  sections: () => readonly LineSection[],
+  ties: () => ReadonlyMap<string, Ties>,
+  frames: Frames,
+): StationLines {
+  const upright = h('div', { class: 'stations-over', 'aria-hidden': 'true' });
+  const flat = h('nav', { class: 'flat', 'aria-label': 'Sections of this page' });
+  const listening = new AbortController();
+  const { signal } = listening;
+  let pointed: string | undefined;
+  let focused: string | undefined;
+  let joined: ({ readonly at: string } & Ties) | undefined;
+  let drawnFlat = '';
+
+  const hosts = (): CellHost[] => sections().flatMap((section) => section.hosts);
+
+  const marks = (): StationMark[] =>
+    sections().flatMap(({ number, post, hosts: cells }) => [
+      { name: String(number), y: middleOf(post, sheet), post: true },
+      ...cells.map((host) => ({
+        name: host.station,
+        y: middleOf(host.label, sheet),
+        state: host.state(),
+      })),
+    ]);
+
+  const drawUpright = (): void => {
+    const top = -sheet.getBoundingClientRect().top;
+    const piece = stationLine({
+      heightPx: sheet.clientHeight,
+      marks: marks(),
+      ...(joined && { joined }),
+      view: { top: Math.max(0, top), bottom: Math.min(sheet.clientHeight, top + window.innerHeight) },
+      lineX: pixels(sheet, '--line'),
+      bandPx: pixels(sheet, '--band'),
+    });
+    upright.replaceChildren(toDom(piece, document));
+  };
+
+  const drawFlat = (): void => {
+    const widthPx = flat.clientWidth;
+    const said = JSON.stringify([widthPx, joined, hosts().length]);
+    if (widthPx === 0 || said === drawnFlat) return;
+    drawnFlat = said;
+    const piece = keyLine({
+      sections: sections().map(({ number, title, element, hosts: cells }) => ({
+        number,
+        name: title,
+        href: `#${element.id}`,
+        stations: cells.map(({ station }) => station),
+      })),
+      widthPx,
+      ...(joined && { joined }),
+    });
+    const held = flat.contains(document.activeElement) ? document.activeElement?.getAttribute('href') : null;
+    flat.replaceChildren(toDom(piece, document));
+    if (typeof held === 'string') flat.querySelector<SVGAElement>(`a[href="${held}"]`)?.focus();
+  };
+
+  const drawNow = (): void => {
+    if (!sheet.isConnected) return;
+    const near = new Set([...(joined?.uses ?? []), ...(joined?.usedBy ?? []), joined?.at]);
+    for (const { station, label } of hosts()) label.classList.toggle('joined', near.has(station));
+    drawUpright();
+    drawFlat();
+  };
+  const redraw = (): void => frames.request(drawNow);
+
+  const join = (): void => {
+    const at = pointed ?? focused;
+    if (at === joined?.at) return;
+    const tied = at === undefined ? undefined : ties().get(at);
+    joined = at === undefined || tied === undefined ? undefined : { at, ...tied };
+    redraw();
+  };
+  const stationAt = (target: EventTarget | null): string | undefined =>
+    target instanceof Element ? target.closest('.cell')?.id : undefined;
+
+  sheet.addEventListener(
+    'pointerover',
+    ({ target, pointerType }) => {
+      // While something is dragged the pointer passes over cells it does not mean.
+      if (pointerType === 'touch' || document.documentElement.classList.contains('dragging')) return;
+      pointed = stationAt(target);
+      join();
+    },
+    { signal },
+  );
+  sheet.addEventListener(
+    'pointerleave',
+    () => {
+      pointed = undefined;
+      join();
+    },
+    { signal },
+  );
+  sheet.addEventListener(
+    'focusin',
+    ({ target }) => {
+      focused = stationAt(target);
+      join();
+    },
+    { signal },
+  );
+  sheet.addEventListener(
+    'focusout',
+    () => {
+      focused = undefined;
+      join();
+    },
+    { signal },
+  );
+  window.addEventListener('scroll', () => joined && redraw(), { signal, passive: true });
+  window.addEventListener('resize', redraw, { signal });
+  const watcher = new ResizeObserver(redraw);
+  watcher.observe(sheet);
+
+  return {
+    upright,
+    flat,
+    redraw,
+    end() {
+      listening.abort();
+      watcher.disconnect();
+    },
+  };
+}

@@ -1,0 +1,195 @@
+import type { Problem, Study } from '../../lib/index.ts';
+import type { Graph, Input } from '../reactive/index.ts';
+import { share } from './share.ts';
+
+/** What heads a study and is no slice of its own. */
+export type Head = Pick<Study, 'format' | 'version' | 'title' | 'reference' | 'notice'>;
+
+/** The last valid study, slice by slice, as inputs of the graph; a slice that says the same stays the same value. */
+export interface Slices {
+  readonly head: Input<Head>;
+  readonly brief: Input<Study['brief']>;
+  readonly books: Input<Study['books']>;
+  readonly options: Input<Study['options']>;
+  readonly priorities: Input<Study['priorities']>;
+  readonly notes: Input<Study['notes']>;
+  readonly decision: Input<Study['decision']>;
+}
+
+/** What undo and redo would take back or bring again, in words; null when there is nothing. */
+export interface History {
+  readonly undo: string | null;
+  readonly redo: string | null;
+}
+
+export interface EditWords {
+  /** Edits that follow each other under one key are one step of undo, until `endStep` or another edit. */
+  readonly coalesce?: string;
+  /** What was done, after the word Undo: 'clear opening'. */
+  readonly what?: string;
+}
+
+export interface StudyStore {
+  readonly slices: Slices;
+  /** The study as typed, valid or not: what fields show. */
+  readonly draft: Input<Study>;
+  /** What is wrong with the draft; while there is anything, the slices keep the last valid study. */
+  readonly problems: Input<readonly Problem[]>;
+  readonly history: Input<History>;
+  /** Changes the draft by a pure function; a change that says the same is none. */
+  readonly edit: (change: (study: Study) => Study, words?: EditWords) => void;
+  /** Ends the step under way, e.g. on release of a drag; a step that came back to its start is forgotten. */
+  readonly endStep: () => void;
+  readonly undo: () => void;
+  readonly redo: () => void;
+  /** Puts another study in its place and forgets the history. Throws when it is not valid: check it first. */
+  readonly open: (study: Study) => void;
+  /** The last valid study. */
+  readonly valid: () => Study;
+}
+
+interface Step {
+  readonly before: Study;
+  readonly after: Study;
+  readonly key: string | undefined;
+  readonly what: string;
+}
+
+const headOf = ({ format, version, title, reference, notice }: Study): Head => ({
+  format,
+  version,
+  title,
+  reference,
+  notice,
+});
+
+/**
+ * The study of a page, kept in a graph: the draft, the last valid study in slices, what is wrong, and a history of
+ * everything. Its inputs are named 'head', 'brief', 'books', 'options', 'priorities', 'notes', 'decision', 'draft',
+ * 'problems' and 'history', and are defined here, so it comes before the cells of the page.
+ * @param check what is wrong with a study; nothing when it is valid
+ * @throws when the study it starts with is not valid
+ */
+export function studyStore(
+  graph: Graph,
+  study: Study,
+  check: (study: Study) => readonly Problem[],
+): StudyStore {
+  const checkOpening = (opened: Study): void => {
+    const [first] = check(opened);
+    if (first === undefined) return;
+    throw new Error(
+      `study: expected a valid one, received one with ${first.path.join('.')} ${first.received}; check it before opening`,
+    );
+  };
+  checkOpening(study);
+
+  let valid = study;
+  let draft = study;
+  let head = headOf(study);
+  let problems: readonly Problem[] = [];
+  let done: Step[] = [];
+  let undone: Step[] = [];
+  let isOpen = false;
+
+  const slices: Slices = {
+    head: graph.input('head', head),
+    brief: graph.input('brief', study.brief),
+    books: graph.input('books', study.books),
+    options: graph.input('options', study.options),
+    priorities: graph.input('priorities', study.priorities),
+    notes: graph.input('notes', study.notes),
+    decision: graph.input('decision', study.decision),
+  };
+  const inputs = {
+    draft: graph.input('draft', draft),
+    problems: graph.input('problems', problems),
+    history: graph.input<History>('history', { undo: null, redo: null }),
+  };
+
+  const tell = (): void => {
+    const undo = done.at(-1)?.what ?? null;
+    const redo = undone.at(-1)?.what ?? null;
+    graph.batch(() => {
+      if (problems.length === 0) {
+        valid = draft;
+        head = share(head, headOf(valid));
+        graph.set(slices.head, head);
+        graph.set(slices.brief, valid.brief);
+        graph.set(slices.books, valid.books);
+        graph.set(slices.options, valid.options);
+        graph.set(slices.priorities, valid.priorities);
+        graph.set(slices.notes, valid.notes);
+        graph.set(slices.decision, valid.decision);
+      }
+      graph.set(inputs.draft, draft);
+      graph.set(inputs.problems, problems);
+      const { history } = inputs;
+      const told = graph.state(history);
+      const same = told.state === 'ready' && told.value.undo === undo && told.value.redo === redo;
+      if (!same) graph.set(history, { undo, redo });
+    });
+  };
+
+  const take = (next: Study): void => {
+    draft = next;
+    problems = share(problems, check(draft));
+    tell();
+  };
+
+  const endStep = (): void => {
+    isOpen = false;
+    const last = done.at(-1);
+    if (last === undefined || last.before !== last.after) return;
+    done.pop();
+    tell();
+  };
+
+  return {
+    slices,
+    ...inputs,
+
+    edit(change, { coalesce, what = 'last change' } = {}) {
+      const last = done.at(-1);
+      const joins = isOpen && coalesce !== undefined && last?.key === coalesce;
+      if (!joins) endStep();
+      const changed = share(draft, change(draft));
+      // A step that comes back to its start is that start itself, so that ending it can tell.
+      const next = joins ? share(last.before, changed) : changed;
+      if (next === draft) return;
+      if (joins) done[done.length - 1] = { ...last, after: next };
+      else done.push({ before: draft, after: next, key: coalesce, what });
+      isOpen = coalesce !== undefined;
+      undone = [];
+      take(next);
+    },
+
+    endStep,
+
+    undo() {
+      endStep();
+      const step = done.pop();
+      if (step === undefined) return;
+      undone.push(step);
+      take(step.before);
+    },
+
+    redo() {
+      endStep();
+      const step = undone.pop();
+      if (step === undefined) return;
+      done.push(step);
+      take(step.after);
+    },
+
+    open(opened) {
+      checkOpening(opened);
+      isOpen = false;
+      done = [];
+      undone = [];
+      take(share(draft, opened));
+    },
+
+    valid: () => valid,
+  };
+}
