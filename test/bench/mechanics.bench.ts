@@ -31,7 +31,8 @@ function ours(id: StandardId): number {
 }
 
 function dense(id: StandardId): number {
-  const { xM, eiKNm2: ei, supportAt } = lineBeam({ spansM, eiKNm2 });
+  const { xM, supportAt } = lineBeam({ spansM, eiKNm2 });
+  const ei = Array.from(xM, (x, e) => eiKNm2((x + (xM[e + 1] ?? x)) / 2));
   const n = xM.length;
   const K = Matrix.zeros(2 * n, 2 * n);
   for (let e = 0; e < n - 1; e++) {

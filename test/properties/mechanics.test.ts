@@ -16,20 +16,19 @@ import {
 const spans = fc.array(fc.double({ min: 10, max: 120, noNaN: true }), { minLength: 1, maxLength: 5 });
 const share = fc.double({ min: 0.02, max: 0.98, noNaN: true });
 
-/** Haunched stiffness: up to nine times deeper in bending at inner supports. */
-function haunched(spansM: readonly number[], haunch: number): LineBeam {
+/** Haunched stiffness: up to nine times as stiff at inner supports. */
+function haunchedStiffness(spansM: readonly number[], haunch: number): (xM: number) => number {
   const supports = spansM.reduce((all, span) => [...all, all[all.length - 1]! + span], [0]);
-  return lineBeam({
-    spansM,
-    eiKNm2: (x) => {
-      const nearest = Math.min(...supports.slice(1, -1).map((s) => Math.abs(s - x)), Infinity);
-      return 1e7 * (1 + haunch * Math.max(0, 1 - nearest / 12));
-    },
-  });
+  return (x) => {
+    const nearest = Math.min(...supports.slice(1, -1).map((s) => Math.abs(s - x)), Infinity);
+    return 1e7 * (1 + haunch * Math.max(0, 1 - nearest / 12));
+  };
 }
-const beams = fc
-  .tuple(spans, fc.double({ min: 0, max: 8, noNaN: true }))
-  .map(([spansM, haunch]) => haunched(spansM, haunch));
+const haunched = fc.tuple(spans, fc.double({ min: 0, max: 8, noNaN: true })).map(([spansM, haunch]) => {
+  const eiKNm2 = haunchedStiffness(spansM, haunch);
+  return { beam: lineBeam({ spansM, eiKNm2 }), eiKNm2 };
+});
+const beams: fc.Arbitrary<LineBeam> = haunched.map(({ beam }) => beam);
 
 describe('lineBeam() by statics', () => {
   it('has reactions that sum to the loads, about both forces and moments', () => {
@@ -84,19 +83,23 @@ describe('lineBeam() by statics', () => {
 
   it('stores as bending energy the work of the load', () => {
     fc.assert(
-      fc.property(beams, share, (beam, at) => {
+      fc.property(haunched, share, ({ beam, eiKNm2 }, at) => {
         const station = Math.max(1, Math.round(at * (beam.xM.length - 2)));
+        fc.pre(!beam.supportAt.includes(station));
         const effects = pointLoads(beam, [{ xM: beam.xM[station]!, loadKN: 1000 }]);
         const work = 500 * effects.deflectionM[station]!;
-        // Moments run straight over an element, so h (a2 + ab + b2) / 3 is the integral of their square.
+        // Moments run straight over an element; the integral of M2 / 2EI by the middle rule in 40 slices.
         let energy = 0;
         for (let e = 0; e < beam.xM.length - 1; e++) {
+          const h = beam.xM[e + 1]! - beam.xM[e]!;
           const a = effects.momentKNm[e]!;
           const b = effects.momentKNm[e + 1]!;
-          energy += ((beam.xM[e + 1]! - beam.xM[e]!) * (a * a + a * b + b * b)) / (6 * beam.eiKNm2[e]!);
+          for (let i = 0; i < 40; i++) {
+            const t = (i + 0.5) / 40;
+            energy += ((h / 40) * (a + t * (b - a)) ** 2) / (2 * eiKNm2(beam.xM[e]! + t * h));
+          }
         }
-        fc.pre(work > 1e-6);
-        expect(energy / work).toBeCloseTo(1, 6);
+        expect(energy / work).toBeCloseTo(1, 2);
       }),
       { seed: 34, numRuns: 80 },
     );
@@ -124,27 +127,17 @@ describe('lineBeam() by statics', () => {
 
   it('is the same beam from the other end', () => {
     fc.assert(
-      fc.property(beams, (beam) => {
+      fc.property(haunched, ({ beam, eiKNm2 }) => {
         const ours = uniform(beam, 10).momentKNm;
         const turned = lineBeam({
           spansM: [...beam.spansM].reverse(),
-          eiKNm2: (x) => {
-            const from = beam.lengthM - x;
-            const e = Math.min(
-              beam.eiKNm2.length - 1,
-              Math.max(
-                0,
-                beam.xM.findLastIndex((at) => at <= from),
-              ),
-            );
-            return beam.eiKNm2[e]!;
-          },
+          eiKNm2: (x) => eiKNm2(beam.lengthM - x),
         });
         const theirs = uniform(turned, 10).momentKNm;
         const scale = Math.max(...ours.map(Math.abs));
-        theirs.forEach((moment, i) =>
-          expect((moment - ours[ours.length - 1 - i]!) / scale).toBeCloseTo(0, 6),
-        );
+        theirs.forEach((moment, i) => {
+          expect((moment - ours[ours.length - 1 - i]!) / scale).toBeCloseTo(0, 6);
+        });
       }),
       { seed: 36, numRuns: 30 },
     );

@@ -28,7 +28,7 @@ export interface Loading {
 
 /** Solves one loading and recovers forces from the element ends. */
 export function effectsOf(beam: LineBeam, loading: Loading): Effects {
-  const { xM, freedoms, eiKNm2 } = beam;
+  const { xM, freedoms, ends } = beam;
   const n = xM.length;
   const held = loading.heldEnds;
   const { w, left, right } = freedoms;
@@ -51,14 +51,16 @@ export function effectsOf(beam: LineBeam, loading: Loading): Effects {
   const deflectionM = new Float64Array(n);
   for (let e = 0; e < n - 1; e++) {
     const h = xM[e + 1]! - xM[e]!;
-    const k = eiKNm2[e]! / (h * h);
     const w0 = u[w[e]!]!;
-    const r0 = u[right[e]!]! * h;
     const w1 = u[w[e + 1]!]!;
-    const r1 = u[left[e + 1]!]! * h;
-    const momentLeft = k * (6 * (w0 - w1) + 4 * r0 + 2 * r1) + held[4 * e]!;
-    const momentRight = -k * (6 * (w0 - w1) + 2 * r0 + 4 * r1) + held[4 * e + 2]!;
-    const shear = -(k / h) * (12 * (w0 - w1) + 6 * (r0 + r1));
+    const chord = (w1 - w0) / h;
+    const turnLeft = u[right[e]!]! - chord;
+    const turnRight = u[left[e + 1]!]! - chord;
+    const free = ends[3 * e]! * turnLeft + ends[3 * e + 1]! * turnRight;
+    const far = -ends[3 * e + 1]! * turnLeft - ends[3 * e + 2]! * turnRight;
+    const shear = (far - free) / h;
+    const momentLeft = free + held[4 * e]!;
+    const momentRight = far + held[4 * e + 2]!;
     if (e === 0) momentKNm[0] = momentLeft;
     momentKNm[e + 1] = momentRight;
     shearRightKN[e] = shear + held[4 * e + 1]!;

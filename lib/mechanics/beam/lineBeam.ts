@@ -1,9 +1,11 @@
 import { bandWidth, factorBand, solveBand } from './bandFactor.ts';
+import { endStiffness, type EndStiffness } from './elementStiffness.ts';
 import { beamMesh, type BeamGeometry } from './beamMesh.ts';
 
 /**
- * A continuous beam on rigid and elastic supports, ready to be loaded. Stiffness is constant within an element
- * (the mean flexibility of the element, by Simpson), so the cubic of a Hermite element is exact between stations.
+ * A continuous beam on rigid and elastic supports, ready to be loaded. Elements take the stiffness along them by their
+ * flexibilities, so that station values are exact for loads at stations; between stations lines follow the cubic through
+ * the values and slopes at both ends, exact where the stiffness is constant.
  */
 export interface LineBeam {
   readonly spansM: readonly number[];
@@ -15,8 +17,8 @@ export interface LineBeam {
   /** Station of each spring, in the order given. */
   readonly springAt: readonly number[];
   readonly springKNPerM: readonly number[];
-  /** Bending stiffness of each element, kNm2. */
-  readonly eiKNm2: Float64Array;
+  /** End stiffnesses of each element. */
+  readonly ends: EndStiffness;
   /** Freedoms: deflection, rotation just left and just right of each station (equal unless hinged). */
   readonly freedoms: {
     readonly count: number;
@@ -47,11 +49,11 @@ export function lineBeam(geometry: BeamGeometry): LineBeam {
   const { xM } = mesh;
   const n = xM.length;
   const freedoms = numberFreedoms(n, mesh.hingeAt);
-  const eiKNm2 = elementStiffness(xM, geometry.eiKNm2);
+  const ends = endStiffness(xM, geometry.eiKNm2);
   const springKNPerM = (geometry.springs ?? []).map((spring) => spring.kNPerM);
 
   const stiffness = new Float64Array(bandWidth * freedoms.count);
-  assemble(stiffness, xM, eiKNm2, freedoms);
+  assemble(stiffness, xM, ends, freedoms);
   mesh.springAt.forEach((station, i) => {
     const k = springKNPerM[i]!;
     if (!(k >= 0)) throw new RangeError(`springs[${i}].kNPerM: expected 0 or more, received ${k}`);
@@ -74,7 +76,7 @@ export function lineBeam(geometry: BeamGeometry): LineBeam {
     supportAt: mesh.supportAt,
     springAt: mesh.springAt,
     springKNPerM,
-    eiKNm2,
+    ends,
     freedoms,
     stiffness,
     factors,
@@ -153,48 +155,39 @@ function numberFreedoms(n: number, hingeAt: readonly number[]): LineBeam['freedo
   return { count, w, left, right };
 }
 
-function elementStiffness(xM: Float64Array, ei: ((xM: number) => number) | undefined): Float64Array {
-  const result = new Float64Array(xM.length - 1).fill(1);
-  if (!ei) return result;
-  const flexibilityAt = (x: number): number => {
-    const value = ei(x);
-    if (!(value > 0)) throw new RangeError(`eiKNm2: expected more than 0 at x = ${x} m, received ${value}`);
-    return 1 / value;
-  };
-  for (let e = 0; e < result.length; e++) {
-    const a = xM[e]!;
-    const b = xM[e + 1]!;
-    // Step just inside the element, so that a jump of stiffness at a station falls on the right side.
-    const inset = 1e-9 * (b - a);
-    const mean = (flexibilityAt(a + inset) + 4 * flexibilityAt((a + b) / 2) + flexibilityAt(b - inset)) / 6;
-    result[e] = 1 / mean;
-  }
-  return result;
-}
-
-/** Stiffness of a prismatic element: EI/h3 [12, 6h, -12, 6h; 6h, 4h2, -6h, 2h2; ...]. */
-function assemble(K: Float64Array, xM: Float64Array, ei: Float64Array, freedoms: LineBeam['freedoms']): void {
+/** Adds each element: end rotations against the chord are r0 + (w0 - w1)/h and r1 + (w0 - w1)/h. */
+function assemble(
+  K: Float64Array,
+  xM: Float64Array,
+  ends: EndStiffness,
+  freedoms: LineBeam['freedoms'],
+): void {
   const add = (i: number, j: number, value: number): void => {
     const row = Math.max(i, j);
     K[bandWidth * row + (row - Math.min(i, j))]! += value;
   };
-  for (let e = 0; e < ei.length; e++) {
+  for (let e = 0; e < xM.length - 1; e++) {
     const h = xM[e + 1]! - xM[e]!;
-    const k = ei[e]! / h ** 3;
+    const aa = ends[3 * e]!;
+    const ab = ends[3 * e + 1]!;
+    const bb = ends[3 * e + 2]!;
+    const left = (aa + ab) / h;
+    const right = (ab + bb) / h;
+    const across = (left + right) / h;
     const w0 = freedoms.w[e]!;
     const r0 = freedoms.right[e]!;
     const w1 = freedoms.w[e + 1]!;
     const r1 = freedoms.left[e + 1]!;
-    add(w0, w0, 12 * k);
-    add(r0, w0, 6 * h * k);
-    add(r0, r0, 4 * h * h * k);
-    add(w1, w0, -12 * k);
-    add(w1, r0, -6 * h * k);
-    add(w1, w1, 12 * k);
-    add(r1, w0, 6 * h * k);
-    add(r1, r0, 2 * h * h * k);
-    add(r1, w1, -6 * h * k);
-    add(r1, r1, 4 * h * h * k);
+    add(w0, w0, across);
+    add(r0, w0, left);
+    add(r0, r0, aa);
+    add(w1, w0, -across);
+    add(w1, r0, -left);
+    add(w1, w1, across);
+    add(r1, w0, right);
+    add(r1, r0, ab);
+    add(r1, w1, -right);
+    add(r1, r1, bb);
   }
 }
 

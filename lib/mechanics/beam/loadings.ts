@@ -42,13 +42,17 @@ export function settle(beam: LineBeam, settlementM: readonly number[]): Effects 
  * between them, positive where it sags the beam. The moments are the parasitic ones: nil in a simple span.
  */
 export function imposedCurvature(beam: LineBeam, kappa1PerM: Float64Array): Effects {
-  const { xM, eiKNm2 } = beam;
+  const { xM, ends } = beam;
   checkStations(beam, kappa1PerM, 'kappa1PerM');
   const held = new Float64Array(4 * (xM.length - 1));
   for (let e = 0; e < xM.length - 1; e++) {
-    const left = -eiKNm2[e]! * kappa1PerM[e]!;
-    const right = -eiKNm2[e]! * kappa1PerM[e + 1]!;
-    const shear = (right - left) / (xM[e + 1]! - xM[e]!);
+    // The free ends would turn by h (2 k0 + k1) / 6 and -h (k0 + 2 k1) / 6; holding them takes these moments.
+    const h = xM[e + 1]! - xM[e]!;
+    const turnLeft = (h * (2 * kappa1PerM[e]! + kappa1PerM[e + 1]!)) / 6;
+    const turnRight = (-h * (kappa1PerM[e]! + 2 * kappa1PerM[e + 1]!)) / 6;
+    const left = -(ends[3 * e]! * turnLeft + ends[3 * e + 1]! * turnRight);
+    const right = ends[3 * e + 1]! * turnLeft + ends[3 * e + 2]! * turnRight;
+    const shear = (right - left) / h;
     held[4 * e] = left;
     held[4 * e + 1] = shear;
     held[4 * e + 2] = right;
