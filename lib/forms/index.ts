@@ -1,6 +1,7 @@
 import type { FormId } from '../model/index.ts';
 import { cableStayed } from './cable-stayed/index.ts';
 import { compositeI } from './composite-i/index.ts';
+import { concreteBox } from './concrete-box/index.ts';
 import type { FormModule } from './formModule.ts';
 import { truss } from './truss/index.ts';
 
@@ -9,6 +10,7 @@ export type { FormModule, Pattern } from './formModule.ts';
 /** Every form the tool can size, by id. Adding a form is one line here beside its folder. */
 export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   'composite-i': compositeI,
+  'concrete-box': concreteBox,
   truss,
   'cable-stayed': cableStayed,
 };
