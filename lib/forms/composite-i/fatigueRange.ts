@@ -74,7 +74,7 @@ export function fatigueRange(model: GirderModel, beam: LineBeam): Float64Array {
 /** Damage equivalent factor of EN 1993-2 9.5.2 at a station; 1 where the standard has none. */
 function damage(model: GirderModel, beam: LineBeam, station: number): number {
   if (model.standardId !== 'lm1') return 1;
-  const { spanStart, spanFall, spanLow, supportLow, supportRise, volume } = compositeData.fatigue.damage;
+  const d = compositeData.fatigue.damage;
   const { spansM } = model.task;
   const x = beam.xM[station]!;
   const span = Math.max(0, model.supportsM.findIndex((end, i) => i > 0 && x <= end + 1e-9) - 1);
@@ -84,8 +84,14 @@ function damage(model: GirderModel, beam: LineBeam, station: number): number {
   const rightPier = span < last && along > 0.85;
   if (leftPier || rightPier) {
     const mean = (spansM[leftPier ? span - 1 : span]! + spansM[leftPier ? span : span + 1]!) / 2;
-    return volume * (supportLow + supportRise * Math.min(1, Math.max(0, (mean - 30) / 50)));
+    const past = Math.min(1, Math.max(0, (mean - 30) / 50));
+    return Math.min(
+      d.supportMost + d.supportMostRise * past,
+      d.volume * (d.supportLow + d.supportRise * past),
+    );
   }
   const share = Math.min(1, Math.max(0, (spansM[span]! - 10) / 70));
-  return volume * Math.max(spanLow, spanStart - spanFall * share);
+  const short = Math.min(1, Math.max(0, (spansM[span]! - 10) / 15));
+  const most = d.spanMostShort + (d.spanMost - d.spanMostShort) * short;
+  return Math.min(most, d.volume * Math.max(d.spanLow, d.spanStart - d.spanFall * share));
 }

@@ -12,6 +12,7 @@ import {
 } from '../../actions/index.ts';
 import { lineBeam, uniform } from '../../mechanics/index.ts';
 import { designSlab, type SlabDesign } from '../common/slab/designSlab.ts';
+import { thickestPlateM } from '../common/plates.ts';
 import { supportPositions } from '../common/supports.ts';
 import { compositeData } from './compositeData.ts';
 import { girderLayout, type GirderLayout } from './girderLayout.ts';
@@ -93,7 +94,8 @@ export function girderModel(task: UnitTask): GirderModel {
   const traffic = amplified(worstTraffic(task, layout, slab, girderM, modularRatio), curve);
   const slabKNm = curve * standard.unitWeights.concreteKNm3 * slab.meanM * share;
   const superimposedKNm = (curve * task.deck.superimposedKNm) / layout.count;
-  const yieldMPa = (thicknessM: number): number => steelYield(grade, thicknessM * 1000);
+  const thickestM = thickestPlateM(task.standard);
+  const yieldMPa = (thicknessM: number): number => steelYield(grade, Math.min(thicknessM, thickestM) * 1000);
   const guessKNm = guessMoments(task, standard, slabKNm, superimposedKNm, traffic);
   const peakKNm = Math.abs(Math.min(0, ...guessKNm));
   const flangeM = Math.sqrt(

@@ -41,7 +41,7 @@ export function secondarySteel(
   const cross = layout.twin ? crossGirders(model, frame / fyKNm2, inner) : crossFrames(model, inner);
 
   const { stiffeners, post } = compositeData;
-  const webM = girderM - run.topM[0]! - run.bottomM[0]!;
+  const webM = girderM - Math.min(...run.topM) - Math.min(...run.bottomM);
   const widthM = stiffeners.widthBaseM + stiffeners.widthPerHeight * girderM;
   const thicknessM = Math.max(stiffeners.leastMm / 1000, widthM / stiffeners.slenderness);
   const pair = 2 * widthM * thicknessM;
@@ -141,11 +141,16 @@ function studsOnGirder(model: GirderModel, run: PlateRun, effects: GirderEffects
     const top = model.short[e]!;
     const { centroidM, inertiaM4 } = girderFigures(figures, platesAt(run, e), top);
     const first = top.slabAreaM2 * (top.slabAxisM - centroidM);
-    const v =
-      uls.superimposed * Math.abs(effects.superimposed.shearRightKN[e]!) +
-      uls.traffic * Math.max(effects.traffic.shearMaxKN[e]!, -effects.traffic.shearMinKN[e]!);
+    const { superimposed, traffic } = effects;
+    const laid = (Math.abs(superimposed.shearRightKN[e]!) + Math.abs(superimposed.shearLeftKN[e + 1]!)) / 2;
+    const moving = (absoluteShear(traffic, e) + absoluteShear(traffic, e + 1)) / 2;
+    const v = uls.superimposed * laid + uls.traffic * moving;
     const perM = Math.max((v * first) / inertiaM4 / studs.resistanceKN, studs.leastPerM2 * run.topWidthM);
     count += perM * model.elementM[e]!;
   }
   return Math.ceil(count);
+}
+
+function absoluteShear(traffic: GirderEffects['traffic'], i: number): number {
+  return Math.max(traffic.shearMaxKN[i]!, -traffic.shearMinKN[i]!);
 }

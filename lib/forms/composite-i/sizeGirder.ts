@@ -96,7 +96,15 @@ function flanged(
   fatigueMPa: number,
   rewidth: boolean,
 ): PlateRun {
-  const needs = flangeNeeds(model, run, moments, equivalentKNm, fatigueMPa);
+  const most = thickestPlateM(model.standardId);
+  const needs = flangeNeeds(
+    model,
+    run,
+    moments,
+    equivalentKNm,
+    fatigueMPa,
+    rewidth ? openWidths * most : most,
+  );
   const widths = rewidth
     ? flangeWidths(
         model,
@@ -104,7 +112,6 @@ function flanged(
         Math.max(...needs.bottom) * run.bottomWidthM,
       )
     : { topM: run.topWidthM, bottomM: run.bottomWidthM };
-  const most = thickestPlateM(model.standardId);
   const kept = (needM: Float64Array, ratio: number): Float64Array =>
     needM.map((t) => Math.min(most, t * ratio));
   return {
@@ -115,6 +122,9 @@ function flanged(
     bottomM: steppedFlange(model, kept(needs.bottom, run.bottomWidthM / widths.bottomM), widths.bottomM),
   };
 }
+
+/** How far past the thickest plate a need may go while the width is still to be chosen: yield is held at the thickest. */
+const openWidths = 1.5;
 
 const use = noUse();
 

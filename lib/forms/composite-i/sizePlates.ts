@@ -67,6 +67,7 @@ export function sizeWeb(model: GirderModel, run: PlateRun, shearKN: Float64Array
     );
     return fits ?? web.mostMm.value / 1000;
   });
+  mirrored(model, need);
   return steps(model, need, model.girderM);
 }
 
@@ -84,7 +85,10 @@ export function flangeWidths(
     flange.leastWidthOverBracing * Math.min(bay * 4, compositeData.pieceLengthM.value),
   );
   const width = (area: number): number =>
-    Math.min(flange.mostWidthM, Math.max(least, Math.sqrt(flange.widthOverThickness * area)));
+    Math.min(
+      flange.mostWidthM,
+      Math.max(least, Math.sqrt(flange.widthOverThickness * area), area / thickestPlateM(model.standardId)),
+    );
   const bottomM = roundWidthUp(width(bottomAreaM2));
   const topM = Math.min(
     bottomM,
@@ -101,6 +105,7 @@ const aim = 0.98;
 /**
  * Flange thicknesses that the moments ask for, by element, m, before they are stepped. Each flange is moved by the
  * stress it lacks or has to spare (its area plus a sixth of the web is what a modulus is made of) a few times over.
+ * @param most thickest flange, m; more than the thickest plate while widths are still open
  */
 export function flangeNeeds(
   model: GirderModel,
@@ -108,12 +113,12 @@ export function flangeNeeds(
   moments: StageMoments,
   equivalentKNm: Float64Array,
   fatigueMPa: number,
+  most = thickestPlateM(model.standardId),
 ): { readonly top: Float64Array; readonly bottom: Float64Array } {
   const elements = model.elementM.length;
   const top = new Float64Array(elements);
   const bottom = new Float64Array(elements);
   const least = compositeData.flange.leastMm / 1000;
-  const most = thickestPlateM(model.standardId);
   const plates = {
     heightM: run.heightM,
     topWidthM: run.topWidthM,
@@ -148,7 +153,16 @@ export function flangeNeeds(
     top[e] = Math.min(most, plates.topM);
     bottom[e] = Math.min(most, plates.bottomM);
   }
+  mirrored(model, top);
+  mirrored(model, bottom);
   return { top, bottom };
+}
+
+/** On symmetrical spans both halves get the greater need: traces of rounding do not decide a plate. */
+function mirrored(model: GirderModel, needM: Float64Array): void {
+  const { spansM } = model.task;
+  if (!spansM.every((spanM, i) => spanM === spansM[spansM.length - 1 - i])) return;
+  for (let e = 0, m = needM.length - 1; e < m; e++, m--) needM[e] = needM[m] = Math.max(needM[e]!, needM[m]!);
 }
 
 function moved(

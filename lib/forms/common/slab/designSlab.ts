@@ -118,6 +118,13 @@ export function designSlab(slab: SlabCase): SlabDesign {
         d.steelRatioMost.value,
         '1',
       ),
+      check(
+        'slab-thickness',
+        'slab no thicker than practical',
+        Math.max(midM, rootM),
+        d.mostThicknessM.value,
+        'm',
+      ),
     ],
   };
 }
