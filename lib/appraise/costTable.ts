@@ -2,6 +2,7 @@ import { formModule } from '../forms/index.ts';
 import type { CostTable, Design, FormId, MeasuredLine, MethodId, Site } from '../model/index.ts';
 import { sideRatioWindow, spanWindow } from '../rules/index.ts';
 import { deckOnSupport, expectedLines, standPierBetween } from '../substructure/index.ts';
+import { methodLines } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { Sizer } from './sizer.ts';
@@ -10,8 +11,18 @@ import type { Sizer } from './sizer.ts';
 const TABLE_SPANS = 10;
 /** Shares of the governing span at which the shorter spans of a unit are sized with the depth of the longest. */
 const SHARES = [0.5, 0.75, 1] as const;
+/** Depths tried for each row before the two beside the best. */
+const TABLE_TRIALS = 3;
+/** Spans under this are culverts, m. */
+const LEAST_SPAN_M = 8;
 /** End over interior span of a trial unit: inside every published window. */
 const TRIAL_END_RATIO = 0.78;
+
+/** A form built by one method. */
+export interface FormAndMethod {
+  readonly form: FormId;
+  readonly method: MethodId;
+}
 
 interface Row {
   readonly spanM: number;
@@ -43,13 +54,31 @@ function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number
     : { spansM: [side, spanM, side], pylons: [1, 2] };
 }
 
-function rowsOf(form: FormId, method: MethodId, site: Site, size: Sizer, costOf: CostOf): Row[] {
+/** Rows of one form and method, each sized when it is first read: a search looks at few of them. */
+interface Rows {
+  readonly spansM: readonly number[];
+  row(index: number): Row;
+}
+
+function rowsOf({ form, method }: FormAndMethod, site: Site, size: Sizer, costOf: CostOf): Rows {
   const { possible } = spanWindow(form);
-  const least = Math.max(possible[0], 8);
-  const most = Math.min(possible[1], Math.max(site.lengthM, 1.05 * least));
-  if (!(least < most)) return [];
+  const least = Math.max(possible[0], LEAST_SPAN_M);
+  const most = Math.min(possible[1], site.lengthM);
+  if (!(least <= most)) {
+    throw new RangeError(`cost table: ${form} has no span that fits a crossing of ${site.lengthM} m`);
+  }
+  const spansM = Array.from(
+    { length: TABLE_SPANS },
+    (_, i) => least * Math.pow(most / least, i / (TABLE_SPANS - 1)),
+  );
   const hung = formModule(form).pattern.kind === 'pylon';
-  const planRadiusM = site.planRadiusM ?? Infinity;
+  const base = {
+    form,
+    method,
+    deck: site.deck,
+    standard: site.standard,
+    planRadiusM: site.planRadiusM ?? Infinity,
+  };
 
   const sized = (
     spanM: number,
@@ -57,56 +86,51 @@ function rowsOf(form: FormId, method: MethodId, site: Site, size: Sizer, costOf:
     pylons: 1 | 2,
   ): { design: Design; perM: number; fixed: number } => {
     const unit = trialUnit(form, spanM, pylons);
-    const design = size({
-      form,
-      method,
-      deck: site.deck,
-      standard: site.standard,
-      planRadiusM,
-      depthM,
-      ...unit,
-    });
-    const length = unit.spansM.reduce((sum, span) => sum + span, 0);
+    const design = size({ ...base, depthM, ...unit });
+    const lines = [...design.lines, ...methodLines([design])];
+    const lengthM = unit.spansM.reduce((sum, span) => sum + span, 0);
     return {
       design,
-      perM: costOf(design.lines.filter((line) => !isFixed(line))) / length,
-      fixed: costOf(design.lines.filter(isFixed)),
+      perM: costOf(lines.filter((line) => !isFixed(line))) / lengthM,
+      fixed: costOf(lines.filter(isFixed)),
     };
   };
 
-  return Array.from({ length: TABLE_SPANS }, (_, i) => {
-    const spanM = least * Math.pow(most / least, i / (TABLE_SPANS - 1));
-    const { spansM } = trialUnit(form, spanM, 1);
-    const depthM = leastCostDepth(depthRange(form, method, spansM, site.deck), (trialM) => {
-      const { design, perM } = sized(spanM, trialM, 1);
-      return { cost: perM, utilisation: design.limitingCheck.utilisation };
-    });
+  const made = (spanM: number): Row => {
+    const { spansM: trialSpans } = trialUnit(form, spanM, 1);
+    const depthM = leastCostDepth(
+      depthRange(form, method, trialSpans, site.deck),
+      (trialM) => {
+        const { design, perM } = sized(spanM, trialM, 1);
+        return { cost: perM, utilisation: design.limitingCheck.utilisation };
+      },
+      TABLE_TRIALS,
+    );
     const whole = sized(spanM, depthM, 1);
     const perM = SHARES.map((share) =>
       share === 1 || hung ? whole.perM : sized(share * spanM, depthM, 1).perM,
     );
     const fixed = hung ? [whole.fixed, whole.fixed, sized(spanM, depthM, 2).fixed] : [whole.fixed];
     return { spanM, depthM, perM, fixed, design: whole.design };
-  });
+  };
+  const known = new Map<number, Row>();
+  return {
+    spansM,
+    row(index) {
+      const found = known.get(index) ?? made(spansM[index]!);
+      known.set(index, found);
+      return found;
+    },
+  };
 }
 
-/** Place of a value among rows whose key rises: index of the interval and share within it, held at both ends. */
-function between<R>(
-  rows: readonly R[],
-  keyOf: (row: R) => number,
-  value: number,
-): readonly [index: number, share: number] {
+/** Place of a value on a rising grid: index of the interval and share within it, held at both ends. */
+function between(grid: readonly number[], value: number): readonly [index: number, share: number] {
   let i = 0;
-  while (i < rows.length - 2 && keyOf(rows[i + 1]!) < value) i += 1;
-  const low = keyOf(rows[i]!);
-  const high = i + 1 < rows.length ? keyOf(rows[i + 1]!) : low;
+  while (i < grid.length - 2 && grid[i + 1]! < value) i += 1;
+  const low = grid[i]!;
+  const high = grid[i + 1] ?? low;
   return [i, high > low ? Math.min(1, Math.max(0, (value - low) / (high - low))) : 0];
-}
-
-/** A form built by one method. */
-export interface FormAndMethod {
-  readonly form: FormId;
-  readonly method: MethodId;
 }
 
 /** Cost tables of one site and one set of rates; each form and method is sized once. */
@@ -116,7 +140,7 @@ export interface TableShelf {
 }
 
 /** Spans beside a support are told apart to this, m: the cost of a support changes slowly with them. */
-const SPAN_CLASS_M = 5;
+const SPAN_CLASS_M = 10;
 
 /**
  * What the search knows of cost, made by the real sizing, take-off and mean rates: deck cost and depth of each form
@@ -125,14 +149,12 @@ const SPAN_CLASS_M = 5;
  * @param costOf money of measured lines at mean rates
  */
 export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf {
-  const shelf = new Map<string, Row[]>();
+  const shelf = new Map<string, Rows>();
   const piers = new Map<string, number>();
-  const rowsFor = ({ form, method }: FormAndMethod): Row[] => {
-    const key = `${form} ${method}`;
-    const found = shelf.get(key) ?? rowsOf(form, method, site, size, costOf);
+  const rowsFor = (asked: FormAndMethod): Rows => {
+    const key = `${asked.form} ${asked.method}`;
+    const found = shelf.get(key) ?? rowsOf(asked, site, size, costOf);
     shelf.set(key, found);
-    if (found.length === 0)
-      throw new RangeError(`cost table: ${form} has no span that fits a crossing of ${site.lengthM} m`);
     return found;
   };
   const roadLevel = (chainageM: number): number => {
@@ -141,17 +163,18 @@ export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf 
   };
 
   const tableFor = (asked: FormAndMethod): CostTable => {
-    const rowsBy = (form: FormId): Row[] =>
+    const rowsBy = (form: FormId): Rows =>
       rowsFor(form === asked.form ? asked : { form, method: formModule(form).methods[0] });
     const read = (form: FormId, spanM: number, value: (row: Row) => number): number => {
       const rows = rowsBy(form);
-      const [i, share] = between(rows, (row) => row.spanM, spanM);
-      const low = value(rows[i]!);
-      return low + share * (value(rows[i + 1] ?? rows[i]!) - low);
+      const [i, share] = between(rows.spansM, spanM);
+      const low = share < 1 ? value(rows.row(i)) : 0;
+      const high = share > 0 ? value(rows.row(i + 1)) : 0;
+      return (1 - share) * low + share * high;
     };
     return {
       deckPerM(form, spanM, governingM) {
-        const [i, within] = between(SHARES, (share) => share, governingM > 0 ? spanM / governingM : 1);
+        const [i, within] = between(SHARES, governingM > 0 ? spanM / governingM : 1);
         const at = (k: number): number => read(form, governingM, (row) => row.perM[k]!);
         return at(i) + within * (at(i + 1) - at(i));
       },
@@ -164,17 +187,11 @@ export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf 
         const found = piers.get(key);
         if (found !== undefined) return found;
         const rows = rowsBy(form);
-        const [i, share] = between(rows, (row) => row.spanM, on);
-        const row = rows[share > 0.5 ? i + 1 : i] ?? rows[i]!;
-        const pier = standPierBetween(
-          site,
-          deckOnSupport(row.design),
-          chainageM,
-          on,
-          on,
-          roadLevel(chainageM),
+        const [i, share] = between(rows.spansM, on);
+        const deck = deckOnSupport(rows.row(share > 0.5 ? i + 1 : i).design);
+        const cost = costOf(
+          expectedLines(standPierBetween(site, deck, chainageM, on, on, roadLevel(chainageM))),
         );
-        const cost = costOf(expectedLines(pier));
         piers.set(key, cost);
         return cost;
       },
