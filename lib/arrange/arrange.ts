@@ -1,5 +1,5 @@
 import type { CostTable, Site } from '../model/index.ts';
-import type { Candidate } from './candidate.ts';
+import { kindOf, type Candidate } from './candidate.ts';
 import { continuousCandidates } from './continuous.ts';
 import { counter, type Counter } from './counter.ts';
 import { frameOf, type Frame } from './frame.ts';
@@ -43,10 +43,15 @@ export function arrange(request: ArrangeRequest, site: Site, table: CostTable): 
   const dropped = counter();
   const frame = frameFor(request, site, table);
   const candidates = candidatesOf(request, frame, table, dropped);
-  const kept = select(candidates, request.keep ?? 3, frame, site, table, dropped).map((best) =>
-    polish(best, request, frame, site, table),
+  const polished = select(candidates, request.keep ?? 3, frame, site, table, dropped)
+    .map((best) => polish(best, request, frame, site, table))
+    .sort((a, b) => a.cost - b.cost);
+  // An anchor pier may have made two of them the same kind.
+  const kept = polished.filter(
+    ({ placed }, i) => polished.findIndex((other) => kindOf(other.placed) === kindOf(placed)) === i,
   );
-  kept.sort((a, b) => a.cost - b.cost);
+  if (kept.length < polished.length)
+    dropped.add('dearer than one kept with as many supports', polished.length - kept.length);
   return {
     arrangements: kept.map(({ units, cost }) => ({ form, method, units, tableCost: cost })),
     dropped: dropped.list(form),

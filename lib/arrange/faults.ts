@@ -12,36 +12,46 @@ function ratioFault(shorter: number, main: number, window: readonly [number, num
   return !(shorter >= window[0] * main - slack && shorter <= window[1] * main + slack);
 }
 
-/** Faults of a main unit on pylons: main span in its band, back or side spans in their windows. */
+/** Ends of the main span of a unit on pylons: between two, or on the longer side of one. */
+function mainSpanOf(unit: Unit): readonly [number, number] {
+  const x = unit.supportsM;
+  const [left, right] = [x[0]!, x.at(-1)!];
+  const places = (unit.pylons ?? []).map((i) => x[i]!);
+  if (places.length >= 2) return [places[0]!, places.at(-1)!];
+  const pylon = places[0] ?? right;
+  return pylon - left >= right - pylon ? [left, pylon] : [pylon, right];
+}
+
+/** Faults of a main unit on pylons: main span in its band, back or side spans in their windows, supports apart. */
 function pylonFault(unit: Unit, limits: Limits, request: ArrangeRequest): string | null {
   const { pattern } = request;
   if (pattern.kind !== 'pylon') return null;
-  const pylons = unit.pylons ?? [];
-  const x = unit.supportsM;
-  const first = x[0]!;
-  const last = x.at(-1)!;
-  const places = pylons.map((i) => x[i]!);
-  let main: number;
-  let outer: boolean;
-  if (places.length === 2) {
-    main = places[1]! - places[0]!;
-    outer = [places[0]! - first, last - places[1]!].some((side) =>
-      ratioFault(side, main, pattern.twoPylonSide),
-    );
-  } else if (places.length === 1) {
-    const left = places[0]! - first;
-    const right = last - places[0]!;
-    main = Math.max(left, right);
-    outer = ratioFault(Math.min(left, right), main, pattern.onePylonBack);
-  } else return 'one or two pylons expected';
+  const count = unit.pylons?.length ?? 0;
+  if (count !== 1 && count !== 2) return 'one or two pylons expected';
+  if (!(Math.min(...spansOf(unit)) >= limits.minSpacingM - 1e-6)) return 'supports too close together';
+  const [from, to] = mainSpanOf(unit);
+  const main = to - from;
   if (!(main >= limits.minSpanM - 1e-6 && main <= limits.maxSpanM + 1e-6))
     return 'span outside the band of the form';
-  return outer ? 'end span outside its window' : null;
+  const beyond = [from - unit.supportsM[0]!, unit.supportsM.at(-1)! - to];
+  const window = count === 1 ? pattern.onePylonBack : pattern.twoPylonSide;
+  const sides = count === 1 ? [Math.max(...beyond)] : beyond;
+  return sides.some((side) => ratioFault(side, main, window)) ? 'end span outside its window' : null;
 }
 
-function unitFault(unit: Unit, request: ArrangeRequest): string | null {
+/** Whether the main span of a unit leaves the widest barred stretch uncovered. */
+function missesOpening(unit: Unit, request: ArrangeRequest, site: Site): boolean {
+  const opening = site.mainOpening;
+  if (unit.role !== 'main' || request.pattern.kind === 'continuous' || opening === null) return false;
+  const [from, to] =
+    request.pattern.kind === 'pylon' ? mainSpanOf(unit) : [unit.supportsM[0]!, unit.supportsM.at(-1)!];
+  return from > opening.fromM + SAME_M || to < opening.toM - SAME_M;
+}
+
+function unitFault(unit: Unit, request: ArrangeRequest, site: Site): string | null {
   const approach = request.approach;
   if (unit.role === 'approach' && approach !== undefined) return spanFault(spansOf(unit), limitsOf(approach));
+  if (missesOpening(unit, request, site)) return 'main span not over the opening';
   const limits = limitsOf(request.windows);
   if (request.pattern.kind === 'pylon') return pylonFault(unit, limits, request);
   const spans = spansOf(unit);
@@ -69,6 +79,6 @@ export function faultsOf(units: readonly Unit[], request: ArrangeRequest, site: 
   const standing = [...places]
     .filter((x) => x > site.startM + SAME_M && x < site.endM - SAME_M)
     .map((x) => standingFault(site, x, request.pierHalfWidthM));
-  const spans = units.map((unit) => unitFault(unit, request));
+  const spans = units.map((unit) => unitFault(unit, request, site));
   return [...new Set([...standing, ...spans].filter((fault) => fault !== null))];
 }

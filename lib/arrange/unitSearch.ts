@@ -34,11 +34,12 @@ export type Visit = (
 ) => boolean;
 
 /**
- * Full search up to this many positions and for one end only: governing spans by whole metres where that is at most
- * `MOST_GOVERNING` of them, every number of spans. Longer crossings and approaches, which have many ends, take fewer
+ * Full search up to this many positions and for one end only: governing spans by half metres, by more where that makes
+ * too many, and every number of spans. Longer crossings and approaches, which have many ends, take fewer
  * governing spans, in even steps of their logarithm, and numbers of spans near the fewest possible for each.
  */
 const MANY = 700;
+const FINEST_M = 0.5;
 const MORE_SPANS = 3;
 const MOST_GOVERNING = 64;
 const APPROACH_GOVERNING = 32;
@@ -64,8 +65,10 @@ export function governingSpans(task: UnitTask): number[] {
   const range = most - least;
   const count = X.length > MANY ? FEW_GOVERNING : manyEnds(task) ? APPROACH_GOVERNING : MOST_GOVERNING;
   if (range <= count) {
-    const steps = Math.max(Math.ceil(range - SLACK), 0);
-    return Array.from({ length: steps + 1 }, (_, i) => Math.min(least + i, Math.max(most, least)));
+    const steps = Math.min(Math.max(Math.ceil(range / FINEST_M - SLACK), 0), count);
+    return Array.from({ length: steps + 1 }, (_, i) =>
+      i === steps ? Math.max(most, least) : least + (i * range) / steps,
+    );
   }
   const growth = (most / least) ** (1 / count);
   return Array.from({ length: count + 1 }, (_, i) => least * growth ** i);
