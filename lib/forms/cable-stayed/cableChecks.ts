@@ -33,8 +33,8 @@ export function cableChecks(bridge: SizedBridge): Check[] {
   );
   const { uls } = standard.factors;
   const anchors = all.filter((i) => layout.stays[i]!.anchor && stays[i]!.permanentKN > 0);
-  for (const i of anchors.slice(0, 1)) {
-    const worst = anchors.reduce((a, b) => (slackOf(bridge, b) > slackOf(bridge, a) ? b : a), i);
+  if (anchors.length > 0) {
+    const worst = anchors.reduce((a, b) => (slackOf(bridge, b) > slackOf(bridge, a) ? b : a));
     checks.push(
       check(
         'back-stay-slack',
@@ -91,7 +91,9 @@ export function deflectionM(bridge: SizedBridge): number {
   const { layout, model, track, traffic } = bridge;
   const [first, second] = layout.pylons;
   const longer = first!.xM >= layout.lengthM - first!.xM ? first!.xM / 2 : (first!.xM + layout.lengthM) / 2;
-  const line = model.deflectionLine(model.stationAt(second ? (first!.xM + second.xM) / 2 : longer));
+  const line = model.deflectionLine(
+    model.stationAt(second ? (first!.xM + second.xM) / 2 : longer, first!.xM),
+  );
   return trafficOnInfluence(traffic.standard === 'lm1' ? serviceTraffic(traffic) : traffic, track, line).max;
 }
 

@@ -8,6 +8,7 @@ import {
   type Effects,
   type LineBeam,
 } from '../../mechanics/index.ts';
+import { supportPositions } from '../common/supports.ts';
 import type { StayLayout } from './stayLayout.ts';
 
 /** Stiffness of one plane: stays as EA/l, the edge girder and the pylon legs. */
@@ -29,14 +30,14 @@ export interface CableModel {
   stayLine(stay: number): Float64Array;
   momentLine(station: number): Float64Array;
   deflectionLine(station: number): Float64Array;
-  /** Deck reaction of a rigid support, upward; stays and pylon not included. */
+  /** Deck reaction of a support of the unit, upward, without what its stays bring; nil at a pylon, where the deck floats. */
   reactionLine(support: number): Float64Array;
-  /** Station nearest to x. */
-  stationAt(xM: number): number;
+  /** Station nearest to x; of two as near, the one nearer to `towardsM`. */
+  stationAt(xM: number, towardsM: number): number;
 }
 
 /**
- * Deck as a line beam on springs at the stays and rigid supports at the piers, coupled with the horizontal movement of
+ * Deck as a line beam on springs at the stays and rigid supports at abutments and piers (it floats past the pylons), coupled with the horizontal movement of
  * the pylon tops that ties all stays of a pylon together (one unknown a pylon). Linear; the stays' sag is in their modulus.
  *
  * With the tops held, stay i works as a spring k sin2. A movement u of the top loads the deck with k sin cos at each stay;
@@ -51,10 +52,16 @@ export function cableModel(
   const { stayKNPerM, pylonKNPerM } = stiffness;
   const hung = stays.flatMap((stay, i) => (stay.anchor ? [] : [i]));
   const springOf = new Map(hung.map((i, order) => [i, order]));
+  const rigidM = supportPositions(spansM).filter((_, j) => !pylons.some((pylon) => pylon.support === j));
+  const rigidOf = (support: number): number =>
+    support - pylons.filter((pylon) => pylon.support < support).length;
   // Springs are stations too, so lines have their peaks exactly and a station about every half bay.
-  const stationsPerSpan = Math.min(50, Math.max(10, Math.ceil(layout.mainSpanM / pylons[0]!.spacingM)));
+  const stationsPerSpan = Math.min(
+    160,
+    Math.max(12, Math.ceil((1.3 * layout.lengthM) / pylons[0]!.spacingM / (rigidM.length - 1))),
+  );
   const beam = lineBeam({
-    spansM,
+    spansM: rigidM.slice(1).map((x, j) => x - rigidM[j]!),
     eiKNm2: () => stiffness.deckEiKNm2,
     stationsPerSpan,
     springs: hung.map((i) => ({ xM: stays[i]!.deckM, kNPerM: stayKNPerM[i]! * stays[i]!.sine ** 2 })),
@@ -122,15 +129,21 @@ export function cableModel(
         deflectionInfluence(beam, station),
         moved.map((effects) => effects.deflectionM[station]!),
       ),
-    reactionLine: (support) =>
-      withTops(
-        reactionInfluence(beam, support),
-        moved.map((effects) => effects.reactionKN[support]!),
-      ),
-    stationAt(xM) {
+    reactionLine(support) {
+      if (pylons.some((pylon) => pylon.support === support)) return new Float64Array(beam.xM.length);
+      return withTops(
+        reactionInfluence(beam, rigidOf(support)),
+        moved.map((effects) => effects.reactionKN[rigidOf(support)]!),
+      );
+    },
+    stationAt(xM, towardsM) {
+      const off = (j: number): number => Math.abs(beam.xM[j]! - xM);
       let best = 0;
-      for (let j = 1; j < beam.xM.length; j++)
-        if (Math.abs(beam.xM[j]! - xM) < Math.abs(beam.xM[best]! - xM)) best = j;
+      for (let j = 1; j < beam.xM.length; j++) {
+        const gain = off(best) - off(j);
+        const nearer = Math.abs(beam.xM[j]! - towardsM) < Math.abs(beam.xM[best]! - towardsM);
+        if (gain > 1e-6 || (gain > -1e-6 && nearer)) best = j;
+      }
       return best;
     },
   };

@@ -4,8 +4,8 @@ import { supportPositions } from '../common/supports.ts';
 import type { SizedBridge } from './sizePlane.ts';
 
 /**
- * Characteristic reactions of the whole deck. At a pylon: everything its stays and its deck bearing bring down, without
- * the pylon's own weight. At an anchor pier: the end bay less the pull of the anchor stays, negative where it must be
+ * Characteristic reactions of the whole deck. At a pylon: everything its stays bring down, without the pylon's own
+ * weight. At an anchor pier: the end bay less the pull of the anchor stays, negative where it must be
  * tied down. A pier inside a back span is taken to carry one bay of deck.
  */
 export function cableReactions(bridge: SizedBridge, task: UnitTask): SupportReaction[] {
@@ -16,9 +16,8 @@ export function cableReactions(bridge: SizedBridge, task: UnitTask): SupportReac
     const pylon = layout.pylons.findIndex((place) => place.support === support);
     const line = model.reactionLine(support);
     let permanentKN = 0;
-    if (pylon >= 0) permanentKN = loadKNm * layout.pylons[pylon]!.spacingM;
-    else if (support === 0 || support === x.length - 1) permanentKN = (loadKNm * endBayM(bridge, at)) / 2;
-    else permanentKN = loadKNm * layout.pylons[0]!.spacingM;
+    if (support === 0 || support === x.length - 1) permanentKN = (loadKNm * endBayM(bridge, at)) / 2;
+    else if (pylon < 0) permanentKN = loadKNm * layout.pylons[0]!.spacingM;
     layout.stays.forEach((stay, i) => {
       const held = stay.anchor && Math.abs(stay.deckM - at) < 1e-6;
       const sign = held ? -1 : stay.pylon === pylon ? 1 : 0;

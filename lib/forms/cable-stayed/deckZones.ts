@@ -64,7 +64,9 @@ export function deckSections(
   const reachM = reachOf(layout, pylon, side);
   const bay = (loadKNm * s * s) / 12;
   const places: { fromPylonM: number; lastingKNm: number }[] = [];
-  const stays = layout.stays.filter((stay) => stay.pylon === pylon && stay.side === side && !stay.anchor);
+  const stays = layout.stays.filter(
+    (stay) => stay.pylon === pylon && stay.side === side && stay.cosine > 0 && !stay.anchor,
+  );
   const reaches = stays
     .map((stay) => Math.abs(stay.deckM - x0))
     .filter((r) => r >= fromM - 1e-6 && r <= toM + 1e-6);
@@ -86,7 +88,7 @@ export function deckSections(
   const pushes = new Map<number, number>();
   return places.map(({ fromPylonM, lastingKNm }) => {
     const atM = x0 + side * fromPylonM;
-    const moment = trafficOnInfluence(traffic, track, model.momentLine(model.stationAt(atM)));
+    const moment = trafficOnInfluence(traffic, track, model.momentLine(model.stationAt(atM, x0)));
     const permanentKN = deckPush(layout, lasting.stayKN, pylon, side, fromPylonM);
     // Sections of one bay have the same stays beyond them.
     const beyond = stays.filter((stay) => Math.abs(stay.deckM - x0) >= fromPylonM - 1e-9).length;

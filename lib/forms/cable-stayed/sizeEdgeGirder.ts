@@ -51,13 +51,16 @@ export interface EdgeGirder {
  * Lightest edge girder for all sections of a stretch. Lasting compression and bending act on the section with the slab
  * at its long-term modulus, traffic on the short-term one; the bottom flange is checked in tension (traffic sagging, no
  * traffic compression) and in compression (traffic hogging with it), the slab in compression. The slab is made thicker
- * where its own stress asks for it, flanges are tried narrow and wide.
+ * where its own stress or the thickest flanges ask for it, flanges are tried narrow and wide.
  */
 export function sizeEdgeGirder(edge: EdgeCase, sections: readonly DeckForces[]): EdgeGirder {
   const { stepM, mostM } = cableData.slabThickening;
   let girder = lightestPlates(edge, edge.slabM, sections);
-  for (let slabM = edge.slabM + stepM; girder.slabUse > 1 && slabM <= mostM + 1e-9; slabM += stepM)
-    girder = lightestPlates(edge, slabM, sections);
+  const over = (one: EdgeGirder): number => Math.max(one.slabUse, one.utilisation);
+  for (let slabM = edge.slabM + stepM; over(girder) > 1 && slabM <= mostM + 1e-9; slabM += stepM) {
+    const thicker = lightestPlates(edge, slabM, sections);
+    if (over(thicker) < over(girder)) girder = thicker;
+  }
   return girder;
 }
 

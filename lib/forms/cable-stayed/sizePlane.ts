@@ -67,7 +67,7 @@ export function sizePlane(task: UnitTask): SizedBridge {
   const heavier = weight(both[0]!) >= weight(both[1]!) ? 0 : 1;
   const traffic = both[heavier]!;
   const fatigueShare = worstLaneShare(task.standard, deck, rigidCrossbeam(planes, heavier));
-  const bays = Math.max(1, Math.ceil(spacingM / cableData.crossSpacingM.value - 0.1));
+  const bays = Math.max(1, Math.round(spacingM / cableData.crossSpacingM.value));
   const floor = sizeFloor({
     standard: task.standard,
     deck,
@@ -104,7 +104,11 @@ export function sizePlane(task: UnitTask): SizedBridge {
     const track = loadTrack(model.beam.xM);
     loads = stayTraffic(model, traffic, fatigueShare, symmetrical);
     loadKNm = fixedKNm + edgeKNm + stayKNm;
-    lasting = lastingForces(layout, loadKNm);
+    lasting = lastingForces(
+      layout,
+      loadKNm,
+      loads.map(({ minKN }) => tautFactor(standard) * -minKN),
+    );
     stays = sizeStays(layout, lasting.stayKN, loads, range);
     const edge: EdgeCase = {
       standard,
@@ -162,6 +166,12 @@ function girderKNm(girder: EdgeGirder, edge: EdgeCase): number {
   return girder.massKgPerM * 0.00981 + thicker;
 }
 
+/** Lasting tension over the traffic it must outlast, with the factors of the standard and a tenth to spare. */
+function tautFactor(standard: LoadStandard): number {
+  const { uls } = standard.factors;
+  return (1.1 * uls.traffic) / uls.permanentFavourable;
+}
+
 function isSymmetrical(spansM: readonly number[], layout: StayLayout): boolean {
   const mirrored = spansM.every((span, i) => Math.abs(span - spansM[spansM.length - 1 - i]!) < 1e-6);
   const [first, second] = layout.pylons;
@@ -214,7 +224,7 @@ function sizePylons(model: CableModel, track: Track, input: PylonInput): SizedPy
       return;
     }
     const vertical = new Float64Array(model.beam.xM.length);
-    let permanentKN = input.loadKNm * pylon.spacingM;
+    let permanentKN = 0;
     let windM2 = 0;
     layout.stays.forEach((stay, i) => {
       if (stay.pylon !== p) return;
@@ -224,8 +234,6 @@ function sizePylons(model: CableModel, track: Track, input: PylonInput): SizedPy
       const line = model.stayLine(i);
       for (let j = 0; j < line.length; j++) vertical[j]! += line[j]! * stay.sine;
     });
-    const bearing = model.reactionLine(pylon.support);
-    for (let j = 0; j < bearing.length; j++) vertical[j]! += bearing[j]!;
     const top = trafficOnInfluence(traffic, track, model.topM[p]!);
     made.push(
       sizePylon({

@@ -11,7 +11,7 @@ export interface PylonDemand {
   readonly belowM: number;
   /** Between the two legs, m. */
   readonly planesM: number;
-  /** Vertical pull of the stays, kN, and of the deck bearing on the crossbeam. */
+  /** Vertical pull of the stays, kN. */
   readonly permanentKN: number;
   readonly trafficKN: number;
   /** Greatest movement of the top under traffic, m. */

@@ -12,8 +12,14 @@ export interface LastingForces {
  * Stay forces under lasting load of `loadKNm` per plane: each suspended stay holds up its own length of deck, so that the
  * deck lies level and bends only between stays; anchor stays bring the top of each pylon into balance, so that the pylon
  * stands straight.
+ * @param tautKN lasting tension each anchor stay needs to stay taut under traffic, by stay; it can be given only where
+ * anchor stays on both sides of a pylon pull against each other
  */
-export function lastingForces(layout: StayLayout, loadKNm: number): LastingForces {
+export function lastingForces(
+  layout: StayLayout,
+  loadKNm: number,
+  tautKN: readonly number[] = layout.stays.map(() => 0),
+): LastingForces {
   const stayKN = layout.stays.map((stay) => (stay.anchor ? 0 : (loadKNm * stay.tributaryM) / stay.sine));
   let slack = false;
   layout.pylons.forEach((_, p) => {
@@ -21,12 +27,17 @@ export function lastingForces(layout: StayLayout, loadKNm: number): LastingForce
     layout.stays.forEach((stay, i) => {
       if (stay.pylon === p) pull += stay.side * stayKN[i]! * stay.cosine;
     });
-    // The anchor stays on the side against the pull take it; with anchors on both sides those on the other are idle.
-    layout.stays.forEach((stay, i) => {
-      if (stay.pylon === p && stay.anchor && stay.side * pull <= 0) stayKN[i] = Math.abs(pull) / stay.cosine;
-    });
-    const anchors = layout.stays.filter((stay) => stay.pylon === p && stay.anchor);
-    if (anchors.length > 0 && anchors.every((stay) => stay.side * pull > 0)) slack = true;
+    const anchors = layout.stays.flatMap((stay, i) => (stay.pylon === p && stay.anchor ? [i] : []));
+    const against = anchors.filter((i) => layout.stays[i]!.side * pull < 0);
+    // Against each other: both take the pull that keeps the slacker one taut, one of them the balance as well.
+    const shared =
+      anchors.length > 1 ? Math.max(...anchors.map((i) => tautKN[i]! * layout.stays[i]!.cosine)) : 0;
+    for (const i of anchors) {
+      const balance = against.includes(i) ? Math.abs(pull) : 0;
+      stayKN[i] = (shared + balance) / layout.stays[i]!.cosine;
+    }
+    if (anchors.length > 0 && against.length === 0 && anchors.length < 2 && Math.abs(pull) > 1e-9)
+      slack = true;
   });
   return { stayKN, slack };
 }

@@ -56,7 +56,7 @@ export function usualPylons(spansM: readonly number[]): number[] {
 /**
  * Semi-fan of stays for one or two pylons.
  *
- * Stays stand at equal steps on the deck from each pylon to midspan (two pylons) or to the far support (one); on the back
+ * Stays stand at equal steps on the deck from each pylon, one upright beside it, to midspan (two pylons) or to the far support (one); on the back
  * span they repeat the same steps as far as it goes, and the rest are gathered at its end support as anchor stays. Both
  * ends of a one-pylon bridge of equal spans have anchor stays. Pylon heights keep the slope of the longest stay.
  * @throws RangeError where pylons do not stand on inner supports
@@ -88,6 +88,8 @@ export function stayLayout(spansM: readonly number[], pylonSupports: readonly nu
   const stays: Stay[] = [];
   let endBayM = 0;
   pylons.forEach((pylon, p) => {
+    // The deck passes the pylon afloat, on a pair of upright stays instead of a bearing that would bend it hard.
+    stays.push(stayAt(pylon, p, 1, 0, 0, count, spacingM));
     for (const side of [-1, 1] as const) {
       const towardsOther = two && (p === 0) === (side === 1);
       const sideM = towardsOther ? reachM : side === 1 ? lengthM - pylon.xM : pylon.xM;
