@@ -26,11 +26,6 @@ export function roundPlateUp(thicknessM: number): number {
   return thicknessM;
 }
 
-/** Next rolled thickness above `thicknessM`, m; 5 mm more past the series. */
-export function nextPlate(thicknessM: number): number {
-  return Math.max(roundPlateUp(thicknessM + 1e-4), thicknessM + 1e-4 > 0.12 ? thicknessM + 0.005 : 0);
-}
-
 /** Width rounded up to the step of `data/forms/plates.json`, m. */
 export function roundWidthUp(widthM: number): number {
   const step = data.widthStepM.value;

@@ -2,7 +2,8 @@ import type { SectionCut, Shape } from '../../model/index.ts';
 import { constantDepth, type DepthAlong } from '../common/depthAlong.ts';
 import { deckFace, soffitLine, upright } from '../common/elevation.ts';
 import { deckFurniture } from '../common/furniture.ts';
-import { elementsPerSpan, type GirderModel } from './girderModel.ts';
+import { elementsPerSpan } from './elementsPerSpan.ts';
+import type { GirderModel } from './girderModel.ts';
 import { platesAt, runsOf, type PlateRun } from './plateRun.ts';
 
 type Point = readonly [x: number, z: number];

@@ -14,12 +14,12 @@ import { lineBeam, uniform } from '../../mechanics/index.ts';
 import { designSlab, type SlabDesign } from '../common/slab/designSlab.ts';
 import { thickestPlateM } from '../common/plates.ts';
 import { supportPositions } from '../common/supports.ts';
+import { bays, braces } from './bracing.ts';
 import { compositeData } from './compositeData.ts';
+import { elementsPerSpan } from './elementsPerSpan.ts';
 import { girderLayout, type GirderLayout } from './girderLayout.ts';
-import { bareGirder, type GirderTop } from './girderSection.ts';
-
-/** Equal elements a span is divided into; plates are constant within one. */
-export const elementsPerSpan = 20;
+import type { GirderTop } from './girderSection.ts';
+import { girderTops } from './girderTops.ts';
 
 /** Everything about one girder that does not change while its plates are sought. */
 export interface GirderModel {
@@ -88,7 +88,7 @@ export function girderModel(task: UnitTask): GirderModel {
   const modulusMPa = materials.steel[grade].eMPa;
   const modularRatio =
     modulusMPa / concrete(task.standard, materials.concreteDefaultMPa[task.standard].slab).ecmMPa;
-  const tops = topsOf(task, layout, slab, girderM, modularRatio, modulusMPa);
+  const tops = girderTops(task, layout, slab, girderM, modularRatio, modulusMPa);
   const share = task.deck.widthM / layout.count;
   const curve = curvatureFactor(task, layout);
   const traffic = amplified(worstTraffic(task, layout, slab, girderM, modularRatio), curve);
@@ -101,7 +101,7 @@ export function girderModel(task: UnitTask): GirderModel {
   const flangeM = Math.sqrt(
     (compositeData.flange.widthOverThickness * peakKNm) / (girderM * yieldMPa(0.05) * 1e3),
   );
-  const braceAtM = bracesOf(task, supportsM, Math.max(compositeData.flange.leastWidthM, flangeM));
+  const braceAtM = braces(task, supportsM, Math.max(compositeData.flange.leastWidthM, flangeM));
   return {
     task,
     standardId: task.standard,
@@ -115,7 +115,7 @@ export function girderModel(task: UnitTask): GirderModel {
     modularRatio,
     ...tops,
     braceAtM,
-    bracingM: baysOf(elementM, braceAtM),
+    bracingM: bays(elementM, braceAtM),
     guessKNm,
     slabKNm,
     curve,
@@ -182,84 +182,6 @@ function amplified(load: TrafficLoad, factor: number): TrafficLoad {
   };
 }
 
-interface Tops {
-  readonly short: readonly GirderTop[];
-  readonly lasting: readonly GirderTop[];
-  readonly cracked: readonly GirderTop[];
-  readonly isCracked: Uint8Array;
-  readonly shrinkageKN: Float64Array;
-}
-
-function topsOf(
-  task: UnitTask,
-  layout: GirderLayout,
-  slab: SlabDesign,
-  girderM: number,
-  n0: number,
-  modulusMPa: number,
-): Tops {
-  const { spansM } = task;
-  const count = spansM.length * elementsPerSpan;
-  const short: GirderTop[] = [];
-  const lasting: GirderTop[] = [];
-  const cracked: GirderTop[] = [];
-  const isCracked = new Uint8Array(count);
-  const shrinkageKN = new Float64Array(count);
-  const tributaryM = task.deck.widthM / layout.count;
-  const thicknessM = slab.meanM;
-  // The soffit of the slab stands on the girder at the line; its mean thickness hangs from the level top.
-  const slabAxisM = girderM + slab.rootM - thicknessM / 2;
-  const n1 = n0 * compositeData.longTermRatio.value;
-  const last = spansM.length - 1;
-  let lastWidthM = NaN;
-  for (let e = 0; e < count; e++) {
-    const span = Math.floor(e / elementsPerSpan);
-    const along = ((e % elementsPerSpan) + 0.5) / elementsPerSpan;
-    const share = compositeData.crackedShare.value;
-    const atLeft = span > 0 && along < share;
-    const atRight = span < last && along > 1 - share;
-    isCracked[e] = atLeft || atRight ? 1 : 0;
-    const widthM = effectiveWidth(task, span, atLeft ? span : atRight ? span + 1 : -1, tributaryM);
-    const area = widthM * thicknessM;
-    const own = (area * thicknessM * thicknessM) / 12;
-    if (widthM === lastWidthM) {
-      short.push(short[e - 1]!);
-      lasting.push(lasting[e - 1]!);
-      cracked.push(cracked[e - 1]!);
-    } else {
-      const bars = compositeData.barsOverPiers[task.standard] * area;
-      const top = (n: number): GirderTop => ({
-        slabAreaM2: area / n,
-        slabInertiaM4: own / n,
-        slabAxisM,
-        barAreaM2: 0,
-        barAxisM: slabAxisM,
-      });
-      short.push(top(n0));
-      lasting.push(top(n1));
-      cracked.push({ ...bareGirder, slabAxisM, barAreaM2: bars, barAxisM: slabAxisM });
-    }
-    lastWidthM = widthM;
-    shrinkageKN[e] = isCracked[e] === 1 ? 0 : (compositeData.shrinkage.strain * modulusMPa * 1e3 * area) / n1;
-  }
-  return { short, lasting, cracked, isCracked, shrinkageKN };
-}
-
-/** Slab that acts with one girder, m: Le/8 on each side under the European standard, all of it in the other. */
-function effectiveWidth(task: UnitTask, span: number, support: number, tributaryM: number): number {
-  if (task.standard === 'hl93') return tributaryM;
-  const { spansM } = task;
-  const lag = compositeData.shearLag;
-  const last = spansM.length - 1;
-  const lengthM =
-    support >= 0
-      ? lag.atSupport * (spansM[support - 1]! + spansM[support]!)
-      : last === 0
-        ? spansM[span]!
-        : (span === 0 || span === last ? lag.endSpan : lag.innerSpan) * spansM[span]!;
-  return Math.min(tributaryM, (2 * lengthM) / lag.eachSide);
-}
-
 /** Design moments of the loads known so far, spread evenly, on a girder of constant stiffness. */
 function guessMoments(
   task: UnitTask,
@@ -283,36 +205,4 @@ function heaviestVehicleKN(standard: LoadStandard): number {
     vehicle.axles.reduce((sum, axle) => sum + axle.loadKN, 0),
   );
   return Math.max(...weights) * (1 + standard.dynamicAllowance);
-}
-
-/** Equal bays in every span; bays that reach into the cracked region of an inner support are halved for slender flanges. */
-function bracesOf(task: UnitTask, supportsM: readonly number[], flangeM: number): number[] {
-  const { mostM, mostOverFlangeWidthAtPiers } = compositeData.bracing;
-  const share = compositeData.crackedShare.value;
-  const last = task.spansM.length - 1;
-  const braces = [0];
-  task.spansM.forEach((spanM, span) => {
-    const bays = Math.max(2, Math.ceil(spanM / mostM - 1e-9));
-    const bay = spanM / bays;
-    const start = supportsM[span]!;
-    for (let b = 0; b < bays; b++) {
-      const near =
-        (span > 0 && b * bay < share * spanM - 1e-9) ||
-        (span < last && (b + 1) * bay > (1 - share) * spanM + 1e-9);
-      if (near && bay > mostOverFlangeWidthAtPiers * flangeM) braces.push(start + (b + 0.5) * bay);
-      braces.push(b === bays - 1 ? supportsM[span + 1]! : start + (b + 1) * bay);
-    }
-  });
-  return braces;
-}
-
-function baysOf(elementM: Float64Array, braceAtM: readonly number[]): Float64Array {
-  let bay = 1;
-  let start = 0;
-  return elementM.map((lengthM) => {
-    const middle = start + lengthM / 2;
-    start += lengthM;
-    while (bay < braceAtM.length - 1 && braceAtM[bay]! < middle) bay++;
-    return braceAtM[bay]! - braceAtM[bay - 1]!;
-  });
 }

@@ -1,5 +1,6 @@
 import { girderFigures, steelArea, type GirderFigures, type GirderTop } from './girderSection.ts';
-import { elementsPerSpan, type GirderModel } from './girderModel.ts';
+import { elementsPerSpan } from './elementsPerSpan.ts';
+import type { GirderModel } from './girderModel.ts';
 import { platesAt } from './plateRun.ts';
 import type { SizedGirder } from './sizeGirder.ts';
 import { totalHog, totalSag } from './stageMoments.ts';

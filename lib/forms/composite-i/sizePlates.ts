@@ -1,12 +1,6 @@
 import { materials } from '../../actions/index.ts';
 import { webShearCapacity } from '../../mechanics/index.ts';
-import {
-  nextPlate,
-  plateThicknessesMm,
-  roundPlateUp,
-  roundWidthUp,
-  thickestPlateM,
-} from '../common/plates.ts';
+import { plateThicknessesMm, roundPlateUp, roundWidthUp, thickestPlateM } from '../common/plates.ts';
 import { plateSteps } from '../common/plateSteps.ts';
 import { compositeData } from './compositeData.ts';
 import { elementChecks, leastFlangeM, noUse } from './elementChecks.ts';
@@ -39,18 +33,13 @@ export function designShear(model: GirderModel, effects: GirderEffects): Float64
   });
 }
 
-/** Distance of web stiffeners in an element, m: at the bracings, and once between them where the web is hard pressed. */
-export function webPanelM(model: GirderModel, e: number): number {
-  return model.bracingM[e]!;
-}
-
-/** Shear resistance of a web of one element, kN. */
+/** Shear resistance of a web of one element, kN; stiffened at the bracings. */
 export function webCapacityKN(model: GirderModel, e: number, webM: number, heightM: number): number {
   return webShearCapacity({
     depthM: heightM,
     thicknessM: webM,
     fyMPa: model.yieldMPa(webM),
-    panelLengthM: webPanelM(model, e),
+    panelLengthM: model.bracingM[e]!,
     partialFactor: model.standard.resistance.steelBuckling,
   });
 }
@@ -198,9 +187,4 @@ function steps(model: GirderModel, need: Float64Array, widthM: number): Float64A
     compositeData.leastPlateLengthM.value,
     roundPlateUp,
   );
-}
-
-/** The next plate thickness up, within the thickest. */
-export function thicker(model: GirderModel, thicknessM: number): number {
-  return Math.min(thickestPlateM(model.standardId), nextPlate(thicknessM));
 }

@@ -1,11 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { plateSteps } from '../../../lib/forms/common/plateSteps.ts';
-import {
-  nextPlate,
-  plateThicknessesMm,
-  roundPlateUp,
-  roundWidthUp,
-} from '../../../lib/forms/common/plates.ts';
+import { plateThicknessesMm, roundPlateUp, roundWidthUp } from '../../../lib/forms/common/plates.ts';
 
 const steel = 7850;
 
@@ -13,12 +8,10 @@ describe('roundPlateUp()', () => {
   it('keeps a rolled thickness and moves anything else to the next', () => {
     for (const mm of plateThicknessesMm) expect(roundPlateUp(mm / 1000)).toBeCloseTo(mm / 1000, 9);
     expect(roundPlateUp(0.0201)).toBeCloseTo(0.022, 9);
-    expect(nextPlate(0.02)).toBeCloseTo(0.022, 9);
   });
 
   it('gives back what is past the series, so that a check can say so', () => {
     expect(roundPlateUp(0.131)).toBe(0.131);
-    expect(nextPlate(0.12)).toBeCloseTo(0.125, 9);
   });
 });
 
