@@ -1,4 +1,5 @@
 import cables from '../../data/evidence/cables.json';
+import compositeI from '../../data/evidence/composite-i.json';
 import loads from '../../data/evidence/loads.json';
 import mechanics from '../../data/evidence/mechanics.json';
 import sections from '../../data/evidence/sections.json';
@@ -7,7 +8,13 @@ import { evidenceFile, type EvidenceRow } from './evidenceRow.ts';
 import { runEvidence, type EvidenceLine } from './runEvidence.ts';
 
 /** Files of `data/evidence` by name; a new file is named here. */
-const files: Readonly<Record<string, unknown>> = { mechanics, loads, sections, cables };
+const files: Readonly<Record<string, unknown>> = {
+  mechanics,
+  loads,
+  sections,
+  cables,
+  'composite-i': compositeI,
+};
 
 /** Names of the files read, with their ending. */
 export function evidenceFileNames(): string[] {

@@ -1,8 +1,16 @@
 import type { EvidenceCase } from '../caseInputs.ts';
+import { sizedForm } from './sizedForm.ts';
 import { continuousBeam, influenceOrdinates, patternedBeam } from './beams.ts';
 import { parabola, stayModulus, stayVolumes } from './cables.ts';
 import { distributionFactors, girderMoments, lm1OnGirder } from './girderDecks.ts';
-import { hollowSection, profiledGirder, rolledSection, threePlates } from './sections.ts';
+import {
+  girderWithSlab,
+  hollowSection,
+  profiledGirder,
+  rolledSection,
+  stackedPlates,
+  threePlates,
+} from './sections.ts';
 import {
   axlesOnSimpleSpan,
   hl93SimpleSpan,
@@ -25,10 +33,13 @@ export const evidenceCases: Readonly<Record<string, EvidenceCase>> = {
   'distribution factors': distributionFactors,
   'girder moments': girderMoments,
   'profiled girder': profiledGirder,
+  'girder with slab': girderWithSlab,
+  'stacked plates': stackedPlates,
   'rolled section': rolledSection,
   'three plates': threePlates,
   'hollow section': hollowSection,
   parabola,
   'stay modulus': stayModulus,
   'stay volumes': stayVolumes,
+  'sized form': sizedForm,
 };

@@ -1,12 +1,17 @@
-import { bredt, compactTorsion, polygonProperties, type SectionPoint } from '../../mechanics/index.ts';
+import {
+  bredt,
+  compactTorsion,
+  polygonProperties,
+  sectionProperties,
+  type SectionPart,
+  type SectionPoint,
+} from '../../mechanics/index.ts';
 import type { EvidenceCase } from '../caseInputs.ts';
 
 /** A girder from its profile: pairs of height above the soffit and full width, straight lines between. Units of the inputs. */
 export const profiledGirder: EvidenceCase = (inputs) => {
   const profile = inputs.table('profile');
-  const right = profile.map(([z = 0, width = 0]): SectionPoint => [width / 2, z]);
-  const left = profile.map(([z = 0, width = 0]): SectionPoint => [-width / 2, z]).reverse();
-  const section = polygonProperties([...right, ...left]);
+  const section = polygonProperties(outline(profile));
   const height = profile[profile.length - 1]![0]!;
   return {
     area: section.areaM2,
@@ -16,6 +21,42 @@ export const profiledGirder: EvidenceCase = (inputs) => {
     inertiaY: section.inertiaYM4,
     compactTorsion: compactTorsion(section.areaM2, section.inertiaM4, section.inertiaYM4),
   };
+};
+
+/** The same girder under slab and haunch, rectangles [width, height] stacked on it and transformed by the modular ratio. */
+export const girderWithSlab: EvidenceCase = (inputs) => {
+  const girder = outline(inputs.table('profile'));
+  let bottomM = Math.max(...girder.map(([, z]) => z));
+  const above = inputs.table('stack').map(([widthM = 0, heightM = 0]): SectionPart => {
+    const part: SectionPart = {
+      kind: 'rect',
+      widthM,
+      heightM,
+      bottomM,
+      eRatio: inputs.number('modularRatio'),
+    };
+    bottomM += heightM;
+    return part;
+  });
+  const section = sectionProperties([{ kind: 'polygon', points: girder }, ...above]);
+  return {
+    area: section.areaM2,
+    centroid: section.centroidM,
+    inertia: section.inertiaM4,
+    modulusBottom: section.wBottomM3,
+  };
+};
+
+/** Plates [width, height] stacked from the bottom up. */
+export const stackedPlates: EvidenceCase = (inputs) => {
+  let bottomM = 0;
+  const parts = inputs.table('plates').map(([widthM = 0, heightM = 0]): SectionPart => {
+    const part: SectionPart = { kind: 'rect', widthM, heightM, bottomM };
+    bottomM += heightM;
+    return part;
+  });
+  const section = sectionProperties(parts);
+  return { area: section.areaM2, inertia: section.inertiaM4 };
 };
 
 /** A rolled I-section with or without its root radii, mm in, cm out. */
@@ -78,3 +119,10 @@ export const hollowSection: EvidenceCase = (inputs) => {
   const walls = [b, h, b, h].map((lengthM) => ({ lengthM, thicknessM }));
   return { torsionCm4: bredt(b * h, walls) };
 };
+
+/** Outline of a symmetrical profile of [height, full width] pairs. */
+function outline(profile: readonly (readonly number[])[]): SectionPoint[] {
+  const right = profile.map(([z = 0, width = 0]): SectionPoint => [width / 2, z]);
+  const left = profile.map(([z = 0, width = 0]): SectionPoint => [-width / 2, z]).reverse();
+  return [...right, ...left];
+}
