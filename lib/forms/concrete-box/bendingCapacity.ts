@@ -36,11 +36,23 @@ export function bendingCapacity(model: BoxModel, steel: TensionSteel, face: Comp
   const flange = Math.min(face.flangeM, blockM);
   const most = fcd * (face.widthM * flange + face.websM * (blockM - flange));
   const used = Math.min(force, most);
-  const inFlange = Math.min(used, fcd * face.widthM * face.flangeM);
-  const inWebs = used - inFlange;
-  const flangeArm = inFlange / (fcd * face.widthM) / 2;
-  const webArm = face.flangeM + (face.websM > 0 ? inWebs / (fcd * face.websM) / 2 : 0);
-  return used * depth - inFlange * flangeArm - inWebs * webArm;
+  return used * (depth - compressionDepth(model, face, used));
+}
+
+/** Depth of the middle of the stress block under a compression, m; see `bendingCapacity`. */
+export function compressionDepth(model: BoxModel, face: CompressedFace, forceKN: number): number {
+  const fcd = model.concrete.fcdMPa * 1e3;
+  const flangeKN = fcd * face.widthM * face.flangeM;
+  if (!(forceKN > flangeKN)) return forceKN / (fcd * face.widthM) / 2;
+  const inWebs = forceKN - flangeKN;
+  const webM = face.flangeM + inWebs / (fcd * face.websM) / 2;
+  return (flangeKN * (face.flangeM / 2) + inWebs * webM) / forceKN;
+}
+
+/** Depth of the stress block, m, that balances a design moment on a face of given width; the effective depth where none does. */
+export function blockDepth(model: BoxModel, momentKNm: number, effectiveM: number, widthM: number): number {
+  const rest = effectiveM ** 2 - (2 * momentKNm) / (model.concrete.fcdMPa * 1e3 * widthM);
+  return rest > 0 ? effectiveM - Math.sqrt(rest) : effectiveM;
 }
 
 /** Design strength of strand at the ultimate limit, MPa: proof stress over its divisor (EN); near its strength (AASHTO). */

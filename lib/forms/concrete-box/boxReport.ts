@@ -9,13 +9,17 @@ export function boxReactions(model: BoxModel, box: SizedBox): SupportReaction[] 
   const { most } = model.traffic;
   const gamma = model.standard.unitWeights.concreteKNm3;
   const parasitic = parasiticReactions(model, box);
+  const last = model.supportsM.length - 1;
+  // At the two ends the reaction is the shear beside it.
+  const end = (j: number): number =>
+    j === 0 ? most.shearMaxKN[0]! : j === last ? -most.shearMinKN[most.shearMinKN.length - 1]! : 0;
   return model.supportsM.map((_, j) => ({
     permanentKN:
       box.own.effects.reactionKN[j]! +
       model.superimposed.reactionKN[j]! +
       gamma * box.own.diaphragmM3[j]! +
       parasitic[j]!,
-    trafficMaxKN: most.reactionMaxKN[j]!,
+    trafficMaxKN: Math.max(most.reactionMaxKN[j]!, end(j)),
     trafficMinKN: most.reactionMinKN[j]!,
   }));
 }

@@ -1,10 +1,12 @@
 import { trafficOnCrossLine } from '../../actions/index.ts';
 import { polygonProperties } from '../../mechanics/index.ts';
+import { faceBarsM2 } from './bendingCapacity.ts';
 import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { Tendons } from './findTendons.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
+import { ultimateMoments } from './ultimateMoments.ts';
 import type { WebDemand } from './webShear.ts';
 
 /** Design shear of the outer web by element of the beam, the worse of its two ends. */
@@ -38,6 +40,8 @@ export function boxShear(
   const lean = Math.hypot(1, layout.slope);
   const strandM2 = (tendons.strandsPerWeb * layout.webs + tendons.straightStrands / 2) * model.strandM2;
   const across = webBending(model, sections);
+  const { down, up } = ultimateMoments(model, own);
+  const momentAt = (i: number): number => Math.max(Math.abs(down[i]!), Math.abs(up[i]!));
   const demands: WebDemand[] = [];
   let mostKN = 0;
   for (let e = 0; e < beam.xM.length - 1; e++) {
@@ -67,16 +71,12 @@ export function boxShear(
         at = i;
       }
     }
-    const lasting =
-      uls.permanent * own.effects.momentKNm[at]! + uls.superimposed * superimposed.momentKNm[at]!;
-    const moment = Math.max(
-      Math.abs(lasting + uls.traffic * most.momentMaxKNm[at]!),
-      Math.abs(lasting + uls.traffic * most.momentMinKNm[at]!),
-    );
+    const moment = (momentAt(e) + momentAt(e + 1)) / 2;
     demands.push({
       shearKN: lean * shearKN,
       momentKNm: moment / layout.webs,
       strandM2: strandM2 / layout.webs,
+      barM2: faceBarsM2(sections.span.bottomWidthM) / layout.webs,
       axialMPa: (tendons.forceKN + tendons.straightKN) / sections.areaM2[at]! / 1e3,
       effectiveM: task.depthM - boxData.ductCoverM.value,
       acrossKNm: across,

@@ -1,13 +1,15 @@
-import { imposedCurvature } from '../../mechanics/index.ts';
-import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
+import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
+import { leastForce, type Drape } from './leastForce.ts';
 import type { LaunchedDeck } from './launchedDeck.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { serviceNeed } from './serviceNeed.ts';
 import { straightStress, tendonStress, type TendonStress } from './tendonForce.ts';
 import { tendonGroup, type TendonGroup } from './tendonGroup.ts';
+import { tendonLine } from './tendonLine.ts';
 import { ultimateBending, type BendingUse } from './ultimateBending.ts';
+import { ultimateNeed } from './ultimateNeed.ts';
 
 /** Tendons of the whole deck. */
 export interface Tendons {
@@ -21,26 +23,26 @@ export interface Tendons {
   readonly straightStrands: number;
   readonly straightKN: number;
   readonly straightInitialKN: number;
-  /** Shares of the greatest eccentricity used in end spans, inner spans and over piers. */
-  readonly drape: readonly [endSpan: number, innerSpan: number, pier: number];
+  /** Shares of the greatest eccentricity used. */
+  readonly drape: Drape;
+  /** Force by which the compression zone was judged: steadied between passes, kN. */
+  readonly steadiedKN: number;
   /** Depth of the draped tendons below the top of the slab, m, and eccentricity below the centroid, m. */
   readonly depthM: Float64Array;
   readonly eccentricityM: Float64Array;
   /** Parasitic moment of unit draped force, m, sagging positive. */
   readonly parasiticM: Float64Array;
-  /** Ultimate bending: worst use in the spans and over the piers, with demand and capacity there, kNm. */
+  /** Ultimate bending: worst use in sagging and in hogging. */
   readonly sag: BendingUse;
   readonly hog: BendingUse;
 }
 
 /** What the search starts from: the tendons of the pass before. */
-export type TendonStart = Pick<Tendons, 'drape' | 'strandsPerWeb' | 'forceKN'>;
-
-const coarse = [0.4, 0.7, 1] as const;
+export type TendonStart = Pick<Tendons, 'drape' | 'strandsPerWeb' | 'forceKN' | 'steadiedKN'>;
 
 /**
- * Finds the drape that needs the least force to keep the concrete compressed (or within its tension) in service, adds
- * strands where ultimate bending asks for more, and rounds up to whole strands in every web.
+ * Finds the drape that needs the least force for service and ultimate bending, rounds up to whole strands in every web,
+ * and adds strands where the exact ultimate check still asks for more.
  */
 export function findTendons(
   model: BoxModel,
@@ -50,36 +52,43 @@ export function findTendons(
   before: TendonStart | null,
 ): Tendons {
   const { webs } = model.layout;
+  const most = mostStrandsPerWeb(model);
   const group = tendonGroup(before?.strandsPerWeb ?? 4 * boxData.tendons[1]!.strands);
   const straight = straightStress(model);
   const straightStrands = launch
     ? evenly(launch.forceKN / (straight.initialMPa * 1e3 * model.strandM2), 2 * webs)
     : 0;
   const straightKN = straightStrands * model.strandM2 * straight.lastingMPa * 1e3;
+
+  const { spansM, depthM: deckM } = model.task;
+  const highM = spansM.length > 1 ? group.fromFaceM : sections.span.topM;
+  const sagM = Math.max(0.01, deckM - group.fromFaceM - highM);
+  const axialMPa = ((before?.forceKN ?? 0) + straightKN) / sections.span.areaM2 / 1e3;
+  const stress = tendonStress(model, sagM, Math.min(axialMPa, model.concrete.fckMPa / 2));
+  const perStrandKN = stress.lastingMPa * model.strandM2 * 1e3;
+
   const line = tendonLine(model, sections, group);
   const service = serviceNeed(model, sections, own, group, straightKN);
-  const need = (drape: Drape): number => {
-    const { eccentricityM: e, parasiticM: m } = line(drape);
-    return service(e, m);
-  };
-  const found = leastForce(need, before?.drape ?? null, model.task.spansM.length);
+  // A deeper compression zone asks for more force and that deepens it again: half the way is steady.
+  const steadiedKN = before ? (before.forceKN + (before.steadiedKN || before.forceKN)) / 2 : 0;
+  const ultimate = ultimateNeed(
+    model,
+    sections,
+    own,
+    stress.lastingMPa,
+    straightStrands * model.strandM2,
+    steadiedKN,
+  );
+  const found = leastForce(
+    (drape) => {
+      const { depthM, eccentricityM, parasiticM } = line(drape);
+      return Math.max(service(eccentricityM, parasiticM), ultimate(depthM, parasiticM));
+    },
+    spansM.length,
+    before?.drape ?? null,
+  );
   const { depthM, eccentricityM, parasiticM } = line(found.drape);
 
-  const longest = Math.max(...model.task.spansM);
-  const sagM =
-    model.task.depthM -
-    group.fromFaceM -
-    (model.task.spansM.length > 1 ? group.fromFaceM : sections.span.topM);
-  const axialMPa = ((before?.forceKN ?? found.forceKN) + straightKN) / sections.span.areaM2 / 1e3;
-  const stress = tendonStress(
-    model,
-    Math.min(Math.max(0.01, sagM), longest),
-    Math.min(axialMPa, 0.6 * model.concrete.fckMPa),
-  );
-  const perStrandKN = Math.max(1, stress.lastingMPa) * model.strandM2 * 1e3;
-
-  const most = mostStrandsPerWeb(model);
-  let strandsPerWeb = Math.min(most, Math.max(1, Math.ceil(found.forceKN / perStrandKN / webs - 1e-6)));
   const bend = (strands: number): [BendingUse, BendingUse] =>
     ultimateBending(model, sections, own, {
       draped: strands * webs * model.strandM2,
@@ -88,18 +97,16 @@ export function findTendons(
       depthM,
       parasiticM,
     });
+  const wanted = Math.ceil(found.forceKN / perStrandKN / webs - 1e-6);
+  let strandsPerWeb = Math.min(most, Math.max(1, wanted));
   let [sag, hog] = bend(strandsPerWeb);
-  for (let pass = 0; pass < 6; pass++) {
-    const use = Math.max(sag.use, hog.use);
-    if (!(use > 1) || strandsPerWeb >= most) break;
-    const more = Math.min(
-      most,
-      Math.max(strandsPerWeb + 1, Math.ceil(strandsPerWeb * (1 + 0.8 * Math.min(use - 1, 0.5)))),
-    );
+  // The slab over the piers may still have to grow: the first pass does not answer for it with strands.
+  while (before && Math.max(sag.use, hog.use) > 1 && strandsPerWeb < most) {
+    const more = strandsPerWeb + Math.max(1, Math.round(0.02 * strandsPerWeb));
     const [sagMore, hogMore] = bend(more);
     // Past the balance of the section more steel is of no use.
-    if (Math.max(sagMore.use, hogMore.use) > use * 0.999) break;
-    strandsPerWeb = more;
+    if (!(Math.max(sagMore.use, hogMore.use) < Math.max(sag.use, hog.use))) break;
+    strandsPerWeb = Math.min(most, more);
     [sag, hog] = [sagMore, hogMore];
   }
   const strands = strandsPerWeb * webs;
@@ -113,6 +120,7 @@ export function findTendons(
     straightKN,
     straightInitialKN: straightStrands * model.strandM2 * straight.initialMPa * 1e3,
     drape: found.drape,
+    steadiedKN,
     depthM,
     eccentricityM,
     parasiticM,
@@ -132,78 +140,4 @@ export function mostStrandsPerWeb(model: BoxModel): number {
 
 function evenly(strands: number, step: number): number {
   return Math.ceil(strands / step - 1e-6) * step;
-}
-
-type Drape = readonly [endSpan: number, innerSpan: number, pier: number];
-
-interface TendonLine {
-  readonly depthM: Float64Array;
-  readonly eccentricityM: Float64Array;
-  readonly parasiticM: Float64Array;
-}
-
-/** Tendon level and parasitic moment for any drape: both are sums of the same shapes. */
-function tendonLine(
-  model: BoxModel,
-  sections: SectionsAlong,
-  group: TendonGroup,
-): (drape: Drape) => TendonLine {
-  const { shapes, parasitic } = model.tendonShapes;
-  const { topM, lowM } = sections.span;
-  const low = Math.max(0, lowM - group.fromFaceM);
-  const high = -Math.max(0, topM - group.fromFaceM);
-  // Where the bottom slab is thicker the centroid lies lower and the tendon higher above it.
-  const shift = sections.topM.map((top) => topM - top);
-  const shiftParasitic = imposedCurvature(
-    model.beam,
-    shift.map((value) => -value),
-  ).momentKNm;
-  const n = shift.length;
-  return ([end, inner, pier]) => {
-    const depthM = new Float64Array(n);
-    const eccentricityM = new Float64Array(n);
-    const parasiticM = new Float64Array(n);
-    const k = [end * low, inner * low, pier * high] as const;
-    for (let i = 0; i < n; i++) {
-      const e = k[0] * shapes[0][i]! + k[1] * shapes[1][i]! + k[2] * shapes[2][i]!;
-      depthM[i] = topM + e;
-      eccentricityM[i] = e + shift[i]!;
-      parasiticM[i] =
-        k[0] * parasitic[0][i]! + k[1] * parasitic[1][i]! + k[2] * parasitic[2][i]! + shiftParasitic[i]!;
-    }
-    return { depthM, eccentricityM, parasiticM };
-  };
-}
-
-/** Coarse grid, then halved steps round the best: the force is the largest of ratios and has one lowest region. */
-function leastForce(
-  need: (drape: Drape) => number,
-  start: Drape | null,
-  spans: number,
-): { readonly drape: Drape; readonly forceKN: number } {
-  const ends = coarse;
-  const inners = spans > 2 ? coarse : ([1] as const);
-  const piers = spans > 1 ? coarse : ([1] as const);
-  let best: Drape = start ?? [1, 1, 1];
-  let least = need(best);
-  const visit = (drape: Drape): void => {
-    const force = need(drape);
-    if (force < least * (1 - 1e-9)) {
-      least = force;
-      best = drape;
-    }
-  };
-  if (start === null) for (const a of ends) for (const b of inners) for (const c of piers) visit([a, b, c]);
-  for (let step = 0.15; step > 0.02; step /= 2) {
-    const [a0, b0, c0] = best;
-    for (const da of [-step, 0, step])
-      for (const db of spans > 2 ? [-step, 0, step] : [0])
-        for (const dc of spans > 1 ? [-step, 0, step] : [0])
-          if (da !== 0 || db !== 0 || dc !== 0) visit([within(a0 + da), within(b0 + db), within(c0 + dc)]);
-  }
-  return { drape: best, forceKN: least };
-}
-
-function within(share: number): number {
-  return Math.min(1, Math.max(0, share));
 }

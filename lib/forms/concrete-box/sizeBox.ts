@@ -1,3 +1,4 @@
+import { blockDepth } from './bendingCapacity.ts';
 import { boxData } from './boxData.ts';
 import { ownWeight, type OwnWeight } from './boxLoads.ts';
 import { roundUp, type BoxModel } from './boxModel.ts';
@@ -6,6 +7,7 @@ import { boxCompressions, type Compressions } from './boxStress.ts';
 import { findTendons, type Tendons } from './findTendons.ts';
 import { launchedDeck, type LaunchedDeck } from './launchedDeck.ts';
 import { sectionsAlong, type SectionsAlong, type Thicknesses } from './sectionsAlong.ts';
+import { ultimateMoments } from './ultimateMoments.ts';
 import { webNeeded, webShear, type WebUse } from './webShear.ts';
 
 /** A box with its thicknesses, tendons and stirrups. */
@@ -37,12 +39,21 @@ export function sizeBox(model: BoxModel): SizedBox {
   let before: Tendons | null = null;
   for (let pass = 1; ; pass++) {
     const box = workOut(model, thicknesses, before);
-    const grown = grow(model, box);
-    const settled = before?.strandsPerWeb === box.tendons.strandsPerWeb;
+    const settled = before !== null && alike(before, box.tendons);
+    const grown = grow(model, box, settled);
     if (pass >= mostPasses || (grown === thicknesses && settled)) return box;
     thicknesses = grown;
     before = box.tendons;
   }
+}
+
+/** The same tendons to within a hundredth of their strands. */
+function alike(a: Tendons, b: Tendons): boolean {
+  return (
+    a.group.tendonsPerWeb === b.group.tendonsPerWeb &&
+    a.group.ductM === b.group.ductM &&
+    Math.abs(a.strandsPerWeb - b.strandsPerWeb) <= 0.01 * b.strandsPerWeb
+  );
 }
 
 function workOut(model: BoxModel, thicknesses: Thicknesses, before: Tendons | null): SizedBox {
@@ -69,19 +80,25 @@ export function elementWebM(sections: SectionsAlong, element: number): number {
   return (sections.webM[element]! + sections.webM[element + 1]!) / 2;
 }
 
-/** Thicker where needed; the same object where nothing is too weak or nothing more can be done. */
-function grow(model: BoxModel, box: SizedBox): Thicknesses {
+/**
+ * Thicker where needed; the same object where nothing is too weak or nothing more can be done. What stresses in service ask for waits
+ * until the tendons have settled. Over the piers the bottom slab holds the whole compression zone of ultimate bending.
+ */
+function grow(model: BoxModel, box: SizedBox, settled: boolean): Thicknesses {
   const t = box.thicknesses;
   const { compressions, tendons } = box;
-  const hogFlange = tendons.hog.use;
   let { webM, supportWebM, bottomM, pierBottomM } = t;
 
-  const pierUse = Math.max(compressions.pierSoffit.use, hogFlange);
-  if (pierUse > 1 && model.task.spansM.length > 1)
-    pierBottomM = thicker(pierBottomM, pierUse, model.mostBottomM);
-  if (compressions.spanSoffit.use > 1)
-    bottomM = thicker(bottomM, compressions.spanSoffit.use, model.mostBottomM);
-  pierBottomM = Math.max(pierBottomM, bottomM);
+  const mostBottomM = roundUp(model.mostBottomM);
+  const slabFor = (nowM: number, needM: number): number =>
+    Math.max(nowM, Math.min(mostBottomM, roundUp(needM)));
+  if (model.task.spansM.length > 1) pierBottomM = slabFor(pierBottomM, zoneOverPiers(model, box));
+  if (settled) {
+    const { spanSoffit, pierSoffit } = compressions;
+    if (spanSoffit.use > 1) bottomM = slabFor(bottomM, thicker(bottomM, spanSoffit.use));
+    if (pierSoffit.use > 1) pierBottomM = slabFor(pierBottomM, thicker(pierBottomM, pierSoffit.use));
+    pierBottomM = Math.max(pierBottomM, bottomM);
+  }
 
   const most = boxData.webMostM.value;
   box.shear.demands.forEach((demand, e) => {
@@ -101,6 +118,20 @@ function grow(model: BoxModel, box: SizedBox): Thicknesses {
   return same ? t : { webM, supportWebM, bottomM, pierBottomM };
 }
 
-function thicker(nowM: number, use: number, mostM: number): number {
-  return Math.max(nowM, Math.min(roundUp(mostM), roundUp(nowM * Math.min(1.6, 1 + 1.2 * (use - 1)) + 1e-3)));
+function thicker(nowM: number, use: number): number {
+  return nowM * Math.min(1.6, 1 + 1.2 * (use - 1)) + 1e-3;
+}
+
+/** Depth of the compression zone over the piers at the ultimate limit, parasitic moment included, m. */
+function zoneOverPiers(model: BoxModel, { own, tendons, sections }: SizedBox): number {
+  const { up } = ultimateMoments(model, own);
+  const { supportAt } = model.beam;
+  const effectiveM = model.task.depthM - tendons.group.fromFaceM;
+  let zoneM = 0;
+  for (const station of supportAt.slice(1, -1)) {
+    const parasitic = model.standard.factors.uls.prestress * tendons.forceKN * tendons.parasiticM[station]!;
+    const hogging = Math.max(0, up[station]! - parasitic);
+    zoneM = Math.max(zoneM, blockDepth(model, hogging, effectiveM, sections.span.bottomWidthM));
+  }
+  return zoneM;
 }

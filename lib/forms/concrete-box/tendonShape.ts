@@ -55,7 +55,8 @@ function lowPoint(span: number, last: number): number {
   return span === 0 ? lowInEndSpan : 1 - lowInEndSpan;
 }
 
-/** Weight of the support level at `u` of the way from the support to the low point, with a reverse curve as far as `turn`. */
-function supportWeight(u: number, turn: number): number {
+/** Weight of the support level part of the `way` from the support to the low point, with a reverse curve as far as `turn`. */
+function supportWeight(way: number, turn: number): number {
+  const u = Math.max(0, way);
   return u < turn ? 1 - (u * u) / turn : (1 - u) ** 2 / (1 - turn);
 }

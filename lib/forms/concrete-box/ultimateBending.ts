@@ -3,6 +3,7 @@ import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
+import { ultimateMoments } from './ultimateMoments.ts';
 
 /** Ultimate bending where it is used most. */
 export interface BendingUse {
@@ -28,34 +29,31 @@ export function ultimateBending(
   own: OwnWeight,
   steel: UltimateSteel,
 ): [sag: BendingUse, hog: BendingUse] {
-  const { uls } = model.standard.factors;
+  const { down, up } = ultimateMoments(model, own);
   const { layout, task } = model;
-  const { most } = model.traffic;
   const top = { widthM: task.deck.widthM, flangeM: layout.slab.meanM };
   const bars = [faceBarsM2(sections.span.bottomWidthM), faceBarsM2(task.deck.widthM)] as const;
   const nil: BendingUse = { use: 0, demandKNm: 0, capacityKNm: 1, station: 0 };
   let sag = nil;
   let hog = nil;
   for (let i = 0; i < sections.areaM2.length; i++) {
-    const lasting =
-      own.effects.momentKNm[i]! * uls.permanent + model.superimposed.momentKNm[i]! * uls.superimposed;
-    const parasitic = uls.prestress * steel.forceKN * steel.parasiticM[i]!;
-    const down = lasting + parasitic + uls.traffic * most.momentMaxKNm[i]!;
-    const up = -(lasting + parasitic + uls.traffic * most.momentMinKNm[i]!);
+    const parasitic = model.standard.factors.uls.prestress * steel.forceKN * steel.parasiticM[i]!;
+    const sagging = down[i]! + parasitic;
+    const hogging = up[i]! - parasitic;
     const websM = layout.webs * sections.webM[i]!;
     const slabs = task.depthM - boxData.ductCoverM.value;
     const tension = (fromFaceM: number, barM2: number) => mixed(steel, fromFaceM, slabs, barM2, task.depthM);
-    if (down > 0) {
+    if (sagging > 0) {
       const capacityKNm = bendingCapacity(model, tension(steel.depthM[i]!, bars[0]), { ...top, websM });
-      sag = worse(sag, down, capacityKNm, i);
+      sag = worse(sag, sagging, capacityKNm, i);
     }
-    if (up > 0) {
+    if (hogging > 0) {
       const capacityKNm = bendingCapacity(model, tension(task.depthM - steel.depthM[i]!, bars[1]), {
         widthM: sections.span.bottomWidthM,
         flangeM: sections.bottomM[i]!,
         websM,
       });
-      hog = worse(hog, up, capacityKNm, i);
+      hog = worse(hog, hogging, capacityKNm, i);
     }
   }
   return [sag, hog];

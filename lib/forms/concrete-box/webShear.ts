@@ -10,6 +10,8 @@ export interface WebDemand {
   /** Bending that goes with it, of one web, kNm, and area of its tendons, m2. */
   readonly momentKNm: number;
   readonly strandM2: number;
+  /** Bars in the tension face that go with one web, m2. */
+  readonly barM2: number;
   /** Mean compression of the section, MPa. */
   readonly axialMPa: number;
   /** Effective depth, m. */
@@ -89,12 +91,13 @@ function sectional(
   webM: number,
   lever: number,
   fy: number,
-  { shearKN, momentKNm, strandM2 }: WebDemand,
+  { shearKN, momentKNm, strandM2, barM2 }: WebDemand,
 ): ShearNeed {
   const { fckMPa } = model.concrete;
   const { ultimateMPa, eMPa } = materials.strand.hl93;
+  const stiffKN = (eMPa * strandM2 + materials.reinforcement.hl93.eMPa * barM2) * 1e3;
   const chordKN = Math.abs(momentKNm) / lever + shearKN - 0.7 * ultimateMPa * 1e3 * strandM2;
-  const strain = strandM2 > 0 ? Math.min(0.006, Math.max(0, chordKN / (eMPa * 1e3 * strandM2))) : 0.006;
+  const strain = Math.min(0.006, Math.max(0, chordKN / stiffKN));
   const beta = 4.8 / (1 + 750 * strain);
   const cot = 1 / Math.tan(((29 + 3500 * strain) * Math.PI) / 180);
   const phi = 0.9;

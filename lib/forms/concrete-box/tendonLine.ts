@@ -1,0 +1,52 @@
+import { imposedCurvature } from '../../mechanics/index.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { Drape } from './leastForce.ts';
+import type { SectionsAlong } from './sectionsAlong.ts';
+import type { TendonGroup } from './tendonGroup.ts';
+
+/** Draped tendons along the deck, at the stations. */
+export interface TendonLine {
+  /** Below the top of the slab, m. */
+  readonly depthM: Float64Array;
+  /** Below the centroid, m. */
+  readonly eccentricityM: Float64Array;
+  /** Parasitic moment of unit force, m, sagging positive. */
+  readonly parasiticM: Float64Array;
+}
+
+/**
+ * Tendon level and parasitic moment for any drape: both are sums of the same shapes. The arrays are used again by the
+ * next call.
+ */
+export function tendonLine(
+  model: BoxModel,
+  sections: SectionsAlong,
+  group: TendonGroup,
+): (drape: Drape) => TendonLine {
+  const { shapes, parasitic } = model.tendonShapes;
+  const { topM, lowM } = sections.span;
+  const low = Math.max(0, lowM - group.fromFaceM);
+  const high = -Math.max(0, topM - group.fromFaceM);
+  // Where the bottom slab is thicker the centroid lies lower and the tendon higher above it.
+  const shift = sections.topM.map((top) => topM - top);
+  const shiftParasitic = imposedCurvature(
+    model.beam,
+    shift.map((value) => -value),
+  ).momentKNm;
+  const n = shift.length;
+  const depthM = new Float64Array(n);
+  const eccentricityM = new Float64Array(n);
+  const parasiticM = new Float64Array(n);
+  return ([end, inner, pier]) => {
+    const a = end * low;
+    const b = inner * low;
+    const c = pier * high;
+    for (let i = 0; i < n; i++) {
+      const e = a * shapes[0][i]! + b * shapes[1][i]! + c * shapes[2][i]!;
+      depthM[i] = topM + e;
+      eccentricityM[i] = e + shift[i]!;
+      parasiticM[i] = a * parasitic[0][i]! + b * parasitic[1][i]! + c * parasitic[2][i]! + shiftParasitic[i]!;
+    }
+    return { depthM, eccentricityM, parasiticM };
+  };
+}
