@@ -83,6 +83,11 @@ function webChecks(model: GirderModel, girder: SizedGirder): Check[] {
     capacity = resistance;
   }
   const checks = [check('shear', 'shear of the webs', demand, capacity, 'kN')];
+  const slender = Math.max(...run.webM.map((t, e) => (model.girderM - run.topM[e]! - run.bottomM[e]!) / t));
+  const most = compositeData.web.mostHeightOverThickness.value;
+  // Webs are sized to this limit: it is news only where the thickest web does not reach it.
+  if (slender > most * 1.0001)
+    checks.push(check('web-slenderness', 'web height over thickness', slender, most, '1'));
   let together = 0;
   for (let j = 1; j < model.task.spansM.length; j++) {
     const station = j * elementsPerSpan;

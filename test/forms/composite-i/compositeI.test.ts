@@ -123,6 +123,12 @@ describe('compositeI.size(task)', () => {
     expect(shallow.warnings.join(' ')).toMatch(/with the heaviest practical plates/u);
   });
 
+  it('says so when the thickest web is too slender for the depth', () => {
+    const deep = compositeI.size(girderTask([50], 9));
+    expect(deep.checks.find((check) => check.id === 'web-slenderness')!.utilisation).toBeGreaterThan(1);
+    expect(design.checks.some((check) => check.id === 'web-slenderness')).toBe(false);
+  });
+
   it('adds a launching check to a launched deck', () => {
     const launched = compositeI.size(girderTask([60, 80, 60], 3.1, { method: 'launch' }));
     expect(launched.checks.some((check) => check.id === 'launching')).toBe(true);
