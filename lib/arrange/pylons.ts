@@ -55,8 +55,9 @@ interface Main {
   readonly b: number;
   readonly mainM: number;
   readonly row: SpanCosts;
-  /** Deck of the main span and fixed cost of the unit. */
-  readonly own: number;
+  /** Deck of the main span and fixed cost of the unit with one pylon and with two. */
+  readonly onePylon: number;
+  readonly twoPylons: number;
 }
 
 /** One pylon at one end of the main span; the other end is the end of the unit. */
@@ -76,7 +77,7 @@ function onePylon(
   const pier = far > 0 && far < X.length - 1 ? half(far, mainM) : 0;
   for (const side of sides) {
     for (const approach of beyond) {
-      const cost = main.own + half(pylon, mainM) + pier + side.cost + approach.cost;
+      const cost = main.onePylon + half(pylon, mainM) + pier + side.cost + approach.cost;
       const at = pylonLeft ? [side.end, pylon, far] : [far, pylon, side.end];
       const [before, after] = pylonLeft ? [side.approach, approach] : [approach, side.approach];
       search.offer({ at, pylons: [1], mainM, cost, before, after });
@@ -95,7 +96,7 @@ function twoPylons(search: MainSearch, main: Main, window: readonly [number, num
   const rights = sidesBeyond(search, b, mainM, window, row, false);
   for (const left of lefts) {
     for (const right of rights) {
-      const cost = main.own + half(a, mainM) + half(b, mainM) + left.cost + right.cost;
+      const cost = main.twoPylons + half(a, mainM) + half(b, mainM) + left.cost + right.cost;
       const at = [left.end, a, b, right.end];
       search.offer({ at, pylons: [1, 2], mainM, cost, before: left.approach, after: right.approach });
     }
@@ -117,8 +118,15 @@ export function pylonLayouts(search: MainSearch, pattern: Extract<Pattern, { kin
         row = spanCosts(table, request.form, whole);
         rows.set(whole, row);
       }
-      const own = spanCostAt(row, mainM) + table.unitFixed(request.form, mainM);
-      const main = { a, b, mainM, row, own };
+      const deck = spanCostAt(row, mainM);
+      const main = {
+        a,
+        b,
+        mainM,
+        row,
+        onePylon: deck + table.unitFixed(request.form, mainM, 1),
+        twoPylons: deck + table.unitFixed(request.form, mainM, 2),
+      };
       const laid = [
         onePylon(search, main, pattern.onePylonBack, true),
         onePylon(search, main, pattern.onePylonBack, false),

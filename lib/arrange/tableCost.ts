@@ -51,7 +51,7 @@ export function tableCost(units: readonly Unit[], site: Site, table: CostTable):
   let cost = 0;
   for (const unit of units) {
     const governingM = governingSpan(unit);
-    cost += table.unitFixed(unit.form, governingM);
+    cost += table.unitFixed(unit.form, governingM, unit.pylons?.length ?? 0);
     for (let i = 1; i < unit.supportsM.length; i += 1) {
       const span = unit.supportsM[i]! - unit.supportsM[i - 1]!;
       cost += span * table.deckPerM(unit.form, span, governingM);

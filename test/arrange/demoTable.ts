@@ -17,7 +17,7 @@ export function demoTable(pier: (chainageM: number) => number = () => 250_000): 
       return a + b * (0.5 * governingM + 0.5 * spanM);
     },
     depthM: (_, governingM) => governingM / 22,
-    unitFixed: (form) => rate(form)[2],
+    unitFixed: (form, _, pylons = 0) => rate(form)[2] * Math.max(pylons, 1),
     support: (_, chainageM, leftM, rightM) => pier(chainageM) + 2500 * (leftM + rightM),
   };
 }

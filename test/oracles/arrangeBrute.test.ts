@@ -18,7 +18,7 @@ function tableFor(phase: number): CostTable {
   return {
     deckPerM: (form, span, governing) => rate(form)[0] + rate(form)[1] * (0.7 * governing + 0.3 * span),
     depthM: () => 1,
-    unitFixed: (form) => rate(form)[2],
+    unitFixed: (form, _, pylons = 0) => rate(form)[2] * Math.max(pylons, 1),
     support: (_, x, left, right) => 220 + 90 * Math.sin(x / 3 + phase) + 6 * (left + right),
   };
 }
@@ -106,12 +106,12 @@ function* rows(
 }
 
 /** Deck and fixed cost of one unit. */
-function unitCost(table: CostTable, form: FormId, row: readonly number[]): number {
+function unitCost(table: CostTable, form: FormId, row: readonly number[], pylons = 0): number {
   const spans = row.slice(1).map((x, i) => x - row[i]!);
   const governing = Math.max(...spans);
   return spans.reduce(
     (sum, s) => sum + s * table.deckPerM(form, s, governing),
-    table.unitFixed(form, governing),
+    table.unitFixed(form, governing, pylons),
   );
 }
 
@@ -138,6 +138,7 @@ function withApproaches(
   mainRow: readonly number[],
   form: FormId,
   best: Best,
+  pylons = 0,
 ): void {
   const a = mainRow[0]!;
   const b = mainRow.at(-1)!;
@@ -146,7 +147,7 @@ function withApproaches(
   for (const left of lefts) {
     for (const right of rights) {
       const all = [...left.slice(0, -1), ...mainRow, ...right.slice(1)];
-      let cost = unitCost(table, form, mainRow) + piersCost(table, all);
+      let cost = unitCost(table, form, mainRow, pylons) + piersCost(table, all);
       if (left.length > 1) cost += unitCost(table, 'composite-i', left);
       if (right.length > 1) cost += unitCost(table, 'composite-i', right);
       best.offer(all.length, cost);
@@ -239,8 +240,8 @@ describe('arrange against brute force', () => {
       share >= least - 1e-9 && share <= most + 1e-9;
     const one = [0.5, 0.9] as const;
     const two = [0.35, 0.5] as const;
-    const offer = (mainRow: readonly number[]): void =>
-      withApproaches(table, places, given.lengthM, mainRow, 'cable-stayed', best);
+    const offer = (mainRow: readonly number[], pylons: number): void =>
+      withApproaches(table, places, given.lengthM, mainRow, 'cable-stayed', best, pylons);
     const least = 0.35 * 8;
     /** Nothing, or one anchor pier, between two supports. */
     const anchors = (from: number, to: number): number[][] => [
@@ -253,16 +254,16 @@ describe('arrange against brute force', () => {
         if (!(a <= from && b >= to && main >= 8 && main <= 20)) continue;
         for (const end of places) {
           if (end > b && inside((end - b) / main, one)) {
-            for (const anchor of anchors(b, end)) offer([a, b, ...anchor, end]);
+            for (const anchor of anchors(b, end)) offer([a, b, ...anchor, end], 1);
           }
           if (end < a && inside((a - end) / main, one)) {
-            for (const anchor of anchors(end, a)) offer([end, ...anchor, a, b]);
+            for (const anchor of anchors(end, a)) offer([end, ...anchor, a, b], 1);
           }
           if (!(end < a && inside((a - end) / main, two))) continue;
           for (const far of places) {
             if (!(far > b && inside((far - b) / main, two))) continue;
             for (const before of anchors(end, a)) {
-              for (const after of anchors(b, far)) offer([end, ...before, a, b, ...after, far]);
+              for (const after of anchors(b, far)) offer([end, ...before, a, b, ...after, far], 2);
             }
           }
         }
