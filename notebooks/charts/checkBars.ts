@@ -2,7 +2,7 @@ import { fixed } from '../format.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
-import { textWidth } from '../drawing/lettering.ts';
+import { textWidth, wrapText } from '../drawing/lettering.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
@@ -27,46 +27,62 @@ export function checkBars(input: CheckBarsInput): Piece {
   const figureRoom = 46;
   const most = Math.max(1.08, ...checks.map((check) => Math.min(check.utilisation, 2)));
   const x = (utilisation: number): number => (Math.min(utilisation, 2) / most) * (widthPx - figureRoom - 8);
-  const pitch = 31;
   const highest = Math.max(...checks.map((check) => check.utilisation));
-  const bottom = 6 + checks.length * pitch;
+  const rows = checks.map((check) => {
+    const governs = check.utilisation === highest;
+    return {
+      check,
+      governs,
+      lines: wrapText(sentence(check.label), widthPx - figureRoom - 4, letters.table, governs ? 600 : 400),
+    };
+  });
+  let bottom = 6;
+  const tops = rows.map(({ lines }) => {
+    const top = bottom;
+    bottom += 15 + lines.length * 16;
+    return top;
+  });
+  const words = 'limit 1.00';
   return sheet(
     widthPx,
     bottom + 22,
     `Utilisation of ${String(checks.length)} checks against a limit of 1.00`,
     [
-      checks.map((check, index) => {
-        const y = 6 + index * pitch;
-        const governs = check.utilisation === highest;
+      el('path', { d: `M${num(x(1))},4V${num(bottom)}`, stroke: ink.accent, 'stroke-width': pens.heavy }),
+      rows.map(({ check, governs, lines }, index) => {
+        const top = tops[index] ?? 0;
+        const lineY = top + lines.length * 16 + 5;
+        const weight = governs ? 600 : 400;
         const over = check.utilisation > 1.0005;
         return g(
           {},
-          label(0, y + 13, sentence(check.label), { size: letters.table, weight: governs ? 600 : 400 }),
-          label(widthPx, y + 13, fixed(check.utilisation, 2), {
+          lines.map((text, at) =>
+            label(0, top + 13 + at * 16, text, { size: letters.table, weight, halo: true }),
+          ),
+          label(widthPx, top + 13, fixed(check.utilisation, 2), {
             size: letters.table,
             anchor: 'end',
-            weight: governs ? 600 : 400,
+            weight,
             fill: over ? ink.accent : colours.ink,
           }),
           el('path', {
-            d: `M0,${num(y + 21)}H${num(widthPx - figureRoom)}`,
+            d: `M0,${num(lineY)}H${num(widthPx - figureRoom)}`,
             stroke: colours.grid,
             'stroke-width': pens.fine,
           }),
           el('path', {
-            d: `M0,${num(y + 21)}H${num(x(check.utilisation))}`,
+            d: `M0,${num(lineY)}H${num(x(check.utilisation))}`,
             stroke: ink.line(form),
             'stroke-width': pens.heavy,
           }),
         );
       }),
-      el('path', { d: `M${num(x(1))},4V${num(bottom)}`, stroke: ink.accent, 'stroke-width': pens.heavy }),
-      label(
-        Math.min(x(1), widthPx - textWidth('limit 1.00', letters.table, 600) / 2),
-        bottom + 15,
-        'limit 1.00',
-        { size: letters.table, weight: 600, anchor: 'middle', fill: ink.accent },
-      ),
+      label(Math.min(x(1), widthPx - textWidth(words, letters.table, 600) / 2), bottom + 15, words, {
+        size: letters.table,
+        weight: 600,
+        anchor: 'middle',
+        fill: ink.accent,
+      }),
     ],
   );
 }

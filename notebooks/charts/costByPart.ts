@@ -43,6 +43,9 @@ const partsUsed = (options: readonly AppraisedOption[]): BillPart[] =>
 /** Head words broken so that a column is no wider than its longest word or bar. */
 const headLines = (part: BillPart): string[] => partNames[part].split(' ');
 
+/** One place below ten; what rounds to nothing is said to be less than a tenth. */
+const partFigure = (value: number): string => (value < 0.05 ? '<0.1' : fixed(value, value < 9.95 ? 1 : 0));
+
 interface Column {
   readonly part: BillPart;
   readonly x: number;
@@ -89,9 +92,13 @@ function layOut(
   return { columns, pxPer: low };
 }
 
+/** Below this the columns have no room for their heads; the chart is then pushed sideways, px. */
+const leastWidthPx = 960;
+
 /** One small bar per part, one scale for all columns, centre line at the reference. Never one stacked bar. */
 export function costByPart(input: CostByPartInput): Piece {
-  const { options, widthPx, reference } = input;
+  const { options, reference } = input;
+  const widthPx = Math.max(input.widthPx, leastWidthPx);
   const ink = formInk(
     input.paper ?? 'colour',
     options.map((option) => option.form),
@@ -156,7 +163,7 @@ export function costByPart(input: CostByPartInput): Piece {
               stroke: ink.barEdge(option.form),
               'stroke-width': pens.fine,
             }),
-            label(end + 4, y + 4, fixed(value, value < 9.95 ? 1 : 0), {
+            label(end + 4, y + 4, partFigure(value), {
               weight: differs ? 600 : 400,
               fill: differs ? colours.ink : colours.second,
             }),

@@ -3,7 +3,7 @@ import { linearAxis, spreadValues } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { interval } from '../drawing/interval.ts';
 import { label } from '../drawing/label.ts';
-import { textWidth, wrapText } from '../drawing/lettering.ts';
+import { wrapText } from '../drawing/lettering.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
@@ -36,7 +36,7 @@ export function groupOdds(group: readonly number[], standing: Standing): string 
   return low === high ? `${low} % either way` : `${low} to ${high} %, either way round`;
 }
 
-/** Brackets at the right of runs that cannot be separated; runs that overlap stand side by side. */
+/** Brackets at the right of runs that cannot be separated; runs that overlap stand side by side, their words below one another. */
 function brackets(
   rows: readonly AppraisedOption[],
   standing: Standing,
@@ -52,19 +52,26 @@ function brackets(
     .map((group) => {
       const places = group.map((number) => at.get(number) ?? 0);
       return { group, from: Math.min(...places), to: Math.max(...places) };
-    });
-  const lanes: number[] = [];
-  return runs.map(({ group, from, to }) => {
-    let lane = lanes.findIndex((end) => end < from);
-    if (lane < 0) lane = lanes.length;
-    lanes[lane] = to;
-    const left = x + lane * 9;
+    })
+    .sort((a, b) => a.from - b.from || a.to - b.to);
+  const ends: number[] = [];
+  const lanes = runs.map(({ from, to }) => {
+    const free = ends.findIndex((end) => end < from);
+    const lane = free < 0 ? ends.length : free;
+    ends[lane] = to;
+    return lane;
+  });
+  const wordsX = x + (Math.max(1, ends.length) - 1) * 9 + 8;
+  let lastFoot = -Infinity;
+  return runs.map(({ group, from, to }, index) => {
+    const left = x + (lanes[index] ?? 0) * 9;
     const top = yOf(from) - pitch * 0.32;
     const bottom = yOf(to) + pitch * 0.32;
-    const odd = runs.length > 1 && lanes.length > 1 && lane > 0;
-    const wordsX = left + 8 + (odd ? 0 : 0);
+    const heads = wrapText('cannot be separated', room - (wordsX - x), letters.drawing, 600);
     const lines = wrapText(groupOdds(group, standing), room - (wordsX - x), letters.drawing);
-    const firstY = (top + bottom) / 2 - (lines.length * 14) / 2 + 3;
+    const high = (heads.length + lines.length) * 14;
+    const firstY = Math.max((top + bottom) / 2 - high / 2 + 11, lastFoot + 18);
+    lastFoot = firstY + high - 14;
     return g(
       {},
       el('path', {
@@ -73,9 +80,9 @@ function brackets(
         stroke: colours.ink,
         'stroke-width': pens.medium,
       }),
-      label(wordsX, firstY, 'cannot be separated', { weight: 600, halo: true }),
-      lines.map((text, index) =>
-        label(wordsX, firstY + (index + 1) * 14, text, { fill: colours.second, halo: true }),
+      heads.map((text, line) => label(wordsX, firstY + line * 14, text, { weight: 600, halo: true })),
+      lines.map((text, line) =>
+        label(wordsX, firstY + (heads.length + line) * 14, text, { fill: colours.second, halo: true }),
       ),
     );
   });
@@ -93,8 +100,8 @@ export function costIntervals(input: CostIntervalsInput): Piece {
   const unit = moneyUnit(input.currency, Math.max(0, ...options.map((option) => option.cost.p90)));
   const pitch = narrow ? 40 : 42;
   const head = 44;
-  const left = narrow ? 74 : 320;
-  const bracketRoom = narrow ? 92 : 148;
+  const left = narrow ? 92 : 320;
+  const bracketRoom = narrow ? 84 : 148;
   const columns = narrow ? 0 : 138;
   const right = widthPx - bracketRoom - columns - (narrow ? 16 : 30);
   const axis = linearAxis(
@@ -214,6 +221,3 @@ export function costTable(input: CostIntervalsInput): Table {
     }),
   };
 }
-
-/** Width of the words beside a bracket, px. */
-export const bracketWords = textWidth('cannot be separated', letters.drawing, 600);

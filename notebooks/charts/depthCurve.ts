@@ -58,7 +58,8 @@ export function depthCurve(input: DepthCurveInput): Piece {
   const ink = formInk(input.paper ?? 'colour', [form], input.prefix ?? 'depth');
   const unit = moneyUnit(input.currency, Math.max(0, ...points.map((point) => point.cost)));
   const left = 40;
-  const right = widthPx - 96;
+  const narrow = widthPx < 480;
+  const right = widthPx - (narrow ? 12 : 96);
   const top = 40;
   const bottom = top + 190;
   const axis = linearAxis(
@@ -87,7 +88,7 @@ export function depthCurve(input: DepthCurveInput): Piece {
           Math.abs(one.depthM - input.depthM) < Math.abs(best.depthM - input.depthM) ? one : best,
         ).cost;
   const last = points[points.length - 1];
-  return sheet(widthPx, bottom + 34, 'Cost of the whole crossing against depth at midspan', [
+  return sheet(widthPx, bottom + (narrow ? 38 : 34), 'Cost of the whole crossing against depth at midspan', [
     flat !== null &&
       g(
         {},
@@ -131,7 +132,11 @@ export function depthCurve(input: DepthCurveInput): Piece {
     axis.ticks.map((tick) =>
       label(axis.x(tick), bottom + 17, tick.toFixed(1), { anchor: 'middle', fill: colours.second }),
     ),
-    label(widthPx, bottom + 17, 'depth at midspan, m', { anchor: 'end', fill: colours.second, halo: true }),
+    label(widthPx, bottom + (narrow ? 31 : 17), 'depth at midspan, m', {
+      anchor: 'end',
+      fill: colours.second,
+      halo: true,
+    }),
     el('path', {
       d: path(points) ?? '',
       fill: 'none',
@@ -140,6 +145,7 @@ export function depthCurve(input: DepthCurveInput): Piece {
       'stroke-linejoin': 'round',
     }),
     last !== undefined &&
+      !narrow &&
       label(axis.x(last.depthM) + 6, money.x(last.cost) + 4, 'whole crossing', {
         size: letters.table,
         weight: 600,

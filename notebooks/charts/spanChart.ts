@@ -3,7 +3,7 @@ import { fixed, length } from '../format.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
-import { textWidth, wrapText } from '../drawing/lettering.ts';
+import { wrapText } from '../drawing/lettering.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
@@ -113,7 +113,7 @@ export function spanChart(input: SpanChartInput): Piece {
 
   return sheet(
     widthPx,
-    foot + 6,
+    foot + (narrow && hasStatistics ? 21 : 6),
     `Structural forms against span${askedM === null ? '' : `, ${length(askedM)} m asked`}`,
     [
       ink.defs.length > 0 && el('defs', {}, ink.defs),
@@ -149,29 +149,22 @@ export function spanChart(input: SpanChartInput): Piece {
             label(narrow ? nameX : wordsX, wordsY + at * (narrow ? 13 : 16), text, {
               size: narrow ? letters.drawing : letters.table,
               fill: out ? colours.third : narrow ? colours.second : colours.ink,
+              halo: narrow,
             }),
           ),
         );
       }),
       askedM !== null &&
         limitLine(x(askedM), 2, bottom, input.askedWords ?? `${length(askedM)} m asked`, ink.accent, widthPx),
-      label(
-        narrow ? 0 : left,
-        foot,
-        `thick: usual range   thin: has been built${hasStatistics ? '   grey: 5, 50 and 95 % of built bridges' : ''}`.replace(
-          / {3}/g,
-          ' \u2002 ',
-        ),
-        { fill: colours.second },
-      ),
+      label(narrow ? 0 : left, foot, 'thick: usual range', { fill: colours.second }),
+      label(narrow ? 110 : left + 108, foot, 'thin: has been built', { fill: colours.second }),
+      hasStatistics &&
+        label(narrow ? 0 : left + 222, foot + (narrow ? 15 : 0), 'grey: 5, 50 and 95 % of built bridges', {
+          fill: colours.second,
+        }),
     ],
   );
 }
-
-/** Widest text a row of the chart can hold at a width, for those who write the words. */
-export const wordsRoom = (widthPx: number): number =>
-  Math.max(0, widthPx - Math.min(Math.max(190, widthPx * 0.235) + 400, widthPx * 0.62) - 82) /
-  textWidth('n', letters.table);
 
 /** The table behind the span chart. */
 export const spanTable = (input: SpanChartInput): Table => ({

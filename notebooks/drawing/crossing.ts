@@ -6,7 +6,7 @@ import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Envelope } from './clearances.ts';
 import { barredDimension, barredWash, clearances, envelopes } from './clearances.ts';
 import type { Room } from './crossingLetters.ts';
-import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
+import { belowGround, depthMarks, levelMarks, names, spareWords, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
 import { dimensionChain } from './dimension.ts';
 import { chainagesShown, crossingScale, elevationBody, levelRange, optionWords } from './elevation.ts';
@@ -93,9 +93,10 @@ export function crossing(input: CrossingInput): Piece {
   const { site, option, widthPx } = input;
   const paper = input.paper ?? 'colour';
   const prefix = input.prefix ?? 'crossing';
-  const scale = input.scale ?? crossingScale(site, widthPx);
+  const scale =
+    input.scale ?? crossingScale(site, widthPx, widthPx < 700 ? 2 : widthPx < 960 ? 5 : undefined);
   const small = scale >= 2000;
-  const withBand = input.band ?? !small;
+  const withBand = input.band ?? (scale <= 2000 && widthPx >= 700);
   const withBar = input.bar ?? true;
   const range = levelRange(site, option, !small);
   const shown = input.window ?? chainagesShown(site, widthPx, scale);
@@ -122,6 +123,7 @@ export function crossing(input: CrossingInput): Piece {
   const barred = small ? null : barredPiece(site, option, list, room);
   const marked = small ? null : clearances(frame, list, ink.accent, room.placer);
   const depths = option === null || small ? [] : depthMarks(site, option, room);
+  const spares = option === null || small ? [] : spareWords(site, option, list, room);
   const levels = small ? [] : levelMarks(site, input.obstacles, room);
   const named = names(site, room);
   const below = small ? [] : belowGround(site, option, room, range.bottomM);
@@ -155,7 +157,7 @@ export function crossing(input: CrossingInput): Piece {
         'defs',
         {},
         ink.defs,
-        el('clipPath', { id: clip }, el('rect', { x: 0, y: 0, width, height: bottomY + 5 })),
+        el('clipPath', { id: clip }, el('rect', { x: -14, y: 0, width: width + 28, height: bottomY + 5 })),
       ),
       g(
         { 'clip-path': `url(#${clip})` },
@@ -173,6 +175,7 @@ export function crossing(input: CrossingInput): Piece {
         marked,
         option !== null && !small && gradients(site, option, frame),
         depths,
+        spares,
         levels,
         named,
         below,

@@ -10,6 +10,7 @@ import {
   spansOf,
   supportChainages,
 } from './alongOption.ts';
+import type { Envelope } from './clearances.ts';
 import { uprightDimension } from './dimension.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters } from './ink.ts';
@@ -55,7 +56,7 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
   for (const { kind, clearance } of obstacles ?? []) {
     if (clearance === null || kind === 'river') continue;
     marks.push({
-      at: [clearance.fromM - 3, clearance.fromM - 8, clearance.toM + 14],
+      at: [clearance.fromM - 3, clearance.fromM - 8, clearance.fromM - 13, clearance.toM + 4],
       levelM: clearance.datumLevelM,
       words: `${level(clearance.datumLevelM)} ${kind === 'railway' ? 'rail' : kind}`,
       water: false,
@@ -168,6 +169,31 @@ export function names(site: Site, room: Room): (Piece | null)[] {
   return [...river, ...ways];
 }
 
+/** What is left between an envelope and the soffit, in words, where it is less than a metre. */
+export function spareWords(
+  site: Site,
+  option: AppraisedOption,
+  list: readonly Envelope[],
+  room: Room,
+): (Piece | null)[] {
+  const { frame } = room;
+  return list.map((one) => {
+    const spares = [0, 0.25, 0.5, 0.75, 1].map(
+      (part) => soffitLevel(site, option, one.fromM + part * (one.toM - one.fromM)) - one.topLevelM,
+    );
+    const least = Math.min(...spares);
+    if (!Number.isFinite(least) || least >= 1) return null;
+    const words = least < -0.005 ? `${level(-least)} too low` : `${level(least)} spare`;
+    const width = textWidth(words, letters.drawing);
+    const top = frame.y(one.topLevelM) + 8;
+    const places = [0, 6, 12].flatMap((down) => [
+      [frame.x(one.fromM) - width - 6, top + down] as const,
+      [frame.x(one.toM) + 42, top + down] as const,
+    ]);
+    return freeLabel(room, places, words, { fill: least < -0.005 ? room.accent : colours.ink }, Infinity);
+  });
+}
+
 /** Founding levels with their spread beside the piles, and the bearing stratum named on its own line. */
 export function belowGround(
   site: Site,
@@ -181,7 +207,7 @@ export function belowGround(
     if (foundation === null || support.chainageM < frame.fromM || support.chainageM > frame.toM) return null;
     const toe = toeLevel(foundation);
     const spread = toeSpread(support);
-    const words = `${foundation.piles === null ? 'founded' : 'toe'} ${fixed(toe, 1)}${spread > 0.05 ? ` ± ${spread.toFixed(1)}` : ''}`;
+    const words = `${foundation.piles === null ? 'founded' : 'toe'} ${fixed(toe, 1)}${spread > 0.05 ? ` ± ${spread.toFixed(spread < 5 ? 1 : 0)}` : ''}`;
     const y = Math.min(frame.y(Math.max(toe, lowestM)), frame.y(lowestM)) - 2;
     const right = frame.x(support.chainageM + foundation.footing.lengthM / 2) + 4;
     const left =
@@ -198,9 +224,10 @@ export function belowGround(
       { fill: colours.second },
     );
   });
+  const said = new Set<string>();
   const bearing = site.groundStretches.map((stretch) => {
     const stratum = stratumOf(stretch);
-    if (stratum === null || stratum.likelyM < lowestM) return null;
+    if (stratum === null || stratum.likelyM < lowestM || said.has(stratum.words)) return null;
     const from = Math.max(stratum.fromM, frame.fromM);
     const to = Math.min(stratum.toM, frame.toM);
     const width = textWidth(stratum.words, letters.drawing) + 12;
@@ -216,7 +243,9 @@ export function belowGround(
           900,
         )
       ];
-    return chosen === undefined ? null : levelMark(chosen.x, y, stratum.words, { colour: colours.second });
+    if (chosen === undefined) return null;
+    said.add(stratum.words);
+    return levelMark(chosen.x, y, stratum.words, { colour: colours.second });
   });
   return [...toes, ...bearing];
 }

@@ -4,7 +4,6 @@ import { groundLevel, leastSoffit, roadLevel, soffitLevel, supportChainages } fr
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
-import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 
@@ -25,31 +24,36 @@ export function bandChainages(site: Site, option: AppraisedOption | null, frame:
     const after = site.groundX[index + 1];
     return before !== undefined && after !== undefined && x > site.startM && x < site.endM;
   });
-  // Where each envelope leaves least room, the figure that decides.
+  // Along each envelope, the places where least is left come first.
   const tightest = site.soffitLimits
     .filter((limit) => limit.kind !== 'flood')
     .map((limit) => {
-      const at = [(limit.fromM + limit.toM) / 2, limit.fromM, limit.toM];
-      if (option === null) return at[0] ?? limit.fromM;
-      const room = (x: number): number => soffitLevel(site, option, x) - limit.levelM;
-      return at.reduce((best, x) => (room(x) < room(best) - 0.005 ? x : best));
+      const at = [0.5, 0, 1, 0.25, 0.75, 0.125, 0.875, 0.375, 0.625].map(
+        (part) => limit.fromM + part * (limit.toM - limit.fromM),
+      );
+      const room = (x: number): number => (option === null ? 0 : soffitLevel(site, option, x) - limit.levelM);
+      return at.sort((one, other) => room(one) - room(other));
     });
   const tens: number[] = [];
   for (let x = Math.ceil(site.startM / 10) * 10; x <= site.endM; x += 10) tens.push(x);
-  const wanted = [
-    ...(option === null ? [site.startM, site.endM] : supportChainages(option)),
-    ...tightest,
+  const taken: number[] = [];
+  const take = (at: number): boolean => {
+    const x = frame.x(at);
+    if (at < frame.fromM || at > frame.toM || x < frame.left + nameRoom + 14 || x > frame.right - 16)
+      return false;
+    if (taken.some((other) => Math.abs(frame.x(other) - x) < pitch)) return false;
+    taken.push(at);
+    return true;
+  };
+  const supports = option === null ? [site.startM, site.endM] : supportChainages(option);
+  for (const at of supports) take(at);
+  for (const places of tightest) places.some(take);
+  for (const at of [
     ...site.zones.filter((zone) => zone.hard).flatMap((zone) => [zone.fromM, zone.toM]),
     ...ground,
     ...tens,
-  ];
-  const taken: number[] = [];
-  for (const at of wanted) {
-    const x = frame.x(at);
-    if (at < frame.fromM || at > frame.toM || x < frame.left + nameRoom + 14 || x > frame.right - 16)
-      continue;
-    if (taken.every((other) => Math.abs(frame.x(other) - x) >= pitch)) taken.push(at);
-  }
+  ])
+    take(at);
   return taken.sort((a, b) => a - b);
 }
 
@@ -148,7 +152,3 @@ export function dataBand(
     table: { head: rows.map((row) => row.name), rows: places.map((at) => rows.map((row) => row.figure(at))) },
   };
 }
-
-/** Room the widest chainage needs, px. */
-export const bandPitch = (chainageM: number): number =>
-  textWidth(chainage(chainageM), letters.drawing, 600) + 6;

@@ -1,6 +1,6 @@
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
-import { textWidth } from './lettering.ts';
+import { textWidth, wrapText } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { sheet } from './sheet.ts';
@@ -24,14 +24,36 @@ export interface KeyLineInput {
   };
 }
 
+const numberWidth = (number: number): number => textWidth(String(number), letters.drawing, 600);
+const nameWidth = (name: string): number => textWidth(name, letters.drawing);
+
+/** A name broken into at most so many lines, as narrow as they can be. */
+function narrowest(name: string, most: number): string[] {
+  const words = name.split(' ');
+  const runs = words.flatMap((_, from) =>
+    words.slice(from).map((__, to) => words.slice(from, from + to + 1)),
+  );
+  const candidates = runs.map((run) => nameWidth(run.join(' '))).sort((a, b) => a - b);
+  const broken = candidates.map((width) => wrapText(name, width + 0.01, letters.drawing));
+  return broken.find((lines) => lines.length <= most) ?? [name];
+}
+
 /** The station line laid flat under the title: posts named, sections as wide as their names; the spans stand on it like a viaduct. */
 export function keyLine(input: KeyLineInput): Piece {
   const { sections, widthPx, joined } = input;
-  const natural = sections.map(
-    (section) => textWidth(`${String(section.number)}  ${section.name}`, letters.drawing, 600) + 20,
-  );
-  const sum = natural.reduce((total, one) => total + one, 0);
-  const named = sum <= widthPx;
+  // Names on one line where there is room, else on two or three; where there is none, the numbers alone.
+  const settings = [1, 2, 3].map((most) => {
+    const names = sections.map(({ name }) => narrowest(name, most));
+    const natural = sections.map(
+      ({ number }, index) =>
+        numberWidth(number) + 4 + Math.max(0, ...(names[index] ?? []).map(nameWidth)) + 14,
+    );
+    return { names, natural, sum: natural.reduce((total, one) => total + one, 0) };
+  });
+  const fitting = settings.find((setting) => setting.sum <= widthPx);
+  const named = fitting !== undefined;
+  const { names, natural, sum } = fitting ?? settings[0]!;
+  const lines = named ? Math.max(1, ...names.map((name) => name.length)) : 1;
   const widths = sections.map((_, index) =>
     named ? ((natural[index] ?? 0) * widthPx) / sum : widthPx / sections.length,
   );
@@ -52,7 +74,7 @@ export function keyLine(input: KeyLineInput): Piece {
   const known = (names: readonly string[]): number[] => names.flatMap((name) => places.get(name) ?? []);
   return sheet(
     widthPx,
-    y + (named ? 24 : 22),
+    y + (named ? 11 + 13 * lines : 22),
     'Sections of this page',
     [
       el('path', { d: `M0,${num(y)}H${num(widthPx)}`, stroke: colours.ink, 'stroke-width': pens.medium }),
@@ -78,9 +100,9 @@ export function keyLine(input: KeyLineInput): Piece {
           el('path', { d: `M${num(x)},${num(y - 5.5)}v11`, stroke: colours.ink, 'stroke-width': pens.thick }),
           label(named ? x - 1.5 : x, y + 19, number, { weight: 600, anchor: named ? 'start' : 'middle' }),
           named &&
-            label(x + textWidth(number, letters.drawing, 600) + 4, y + 19, section.name, {
-              fill: colours.second,
-            }),
+            (names[index] ?? []).map((line, row) =>
+              label(x + numberWidth(section.number) + 4, y + 19 + row * 13, line, { fill: colours.second }),
+            ),
         );
       }),
       at !== undefined &&

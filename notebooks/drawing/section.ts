@@ -28,6 +28,8 @@ export interface SectionInput {
   readonly design: Design;
   readonly widthPx: number;
   readonly scale?: Scale;
+  /** One cut or view by its name, e.g. 'pylon'; otherwise the deck, in halves where it is deeper at its piers. */
+  readonly at?: string;
   readonly callouts?: readonly Callout[];
   readonly paper?: Paper;
   readonly bar?: boolean;
@@ -59,7 +61,7 @@ function heights(left: SectionCut, right: SectionCut | null): Height[] {
 export function section(input: SectionInput): Piece {
   const { design, widthPx } = input;
   const prefix = input.prefix ?? 'section';
-  const cuts = cutsShown(design);
+  const cuts = cutsShown(design, input.at);
   const ink = formInk(input.paper ?? 'colour', [design.task.form], prefix);
   const name = `Cross-section, ${formLooks[design.task.form].short.toLowerCase()}`;
   if (cuts === null)
@@ -107,7 +109,7 @@ export function section(input: SectionInput): Piece {
   return sheet(widthPx, input.bar === false ? barY - 20 : barY + 12, spoken, [
     ink.defs.length > 0 && el('defs', {}, ink.defs),
     el('path', { d: extensions, stroke: colours.rule, 'stroke-width': pens.fine, fill: 'none' }),
-    cutPiece(design, place, ink, prefix, topY, bottomY),
+    cutPiece(design, place, ink, prefix, topY, bottomY, input.at),
     cuts.right !== null && [
       label(place.x(0) - 10, topY - 6, `half at ${cuts.left.at}`, {
         anchor: 'end',

@@ -97,18 +97,30 @@ function shapePiece(shape: Shape, place: SectionPlace, form: FormId, ink: FormIn
   });
 }
 
-/** The cuts to show: one whole, or, where a deck is deeper at its piers, left half at the pier and right half at midspan. */
+/** Views that are not a cut through the deck. */
+const isView = (cut: SectionCut): boolean => /pylon|tower|anchor/.test(cut.at);
+
+/**
+ * The cuts to show: one whole, or, where a deck is deeper at its piers, left half at the pier and right half at midspan.
+ * @param at a cut or view by its name, e.g. 'pylon'; null where there is none of that name
+ */
 export function cutsShown(
   design: Design,
+  at?: string,
 ): { readonly left: SectionCut; readonly right: SectionCut | null } | null {
-  const first = design.sections[0];
+  if (at !== undefined) {
+    const named = design.sections.find((cut) => cut.at === at);
+    return named === undefined ? null : { left: named, right: null };
+  }
+  const decks = design.sections.filter((cut) => !isView(cut));
+  const first = decks[0] ?? design.sections[0];
   if (first === undefined) return null;
-  const byDepth = [...design.sections].sort((a, b) => lowestOf(a.shapes) - lowestOf(b.shapes));
+  const byDepth = [...decks].sort((a, b) => lowestOf(a.shapes) - lowestOf(b.shapes));
   const deep = byDepth[0] ?? first;
   const shallow = byDepth[byDepth.length - 1] ?? first;
   return lowestOf(shallow.shapes) - lowestOf(deep.shapes) > 0.05
     ? { left: deep, right: shallow }
-    : { left: design.sections.find((cut) => cut.at === 'midspan') ?? first, right: null };
+    : { left: decks.find((cut) => cut.at === 'midspan') ?? first, right: null };
 }
 
 /** A section as cut, whole or in two halves about the centre line, between two levels of the sheet in px. */
@@ -119,8 +131,9 @@ export function cutPiece(
   prefix: string,
   top: number,
   bottom: number,
+  at?: string,
 ): Piece | null {
-  const cuts = cutsShown(design);
+  const cuts = cutsShown(design, at);
   if (cuts === null) return null;
   const { form } = design.task;
   const stippleId = `${prefix}-stipple-${form}`;

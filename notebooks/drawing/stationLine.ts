@@ -1,5 +1,6 @@
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { sheet } from './sheet.ts';
@@ -78,12 +79,38 @@ function stretch(lineX: number, from: number, to: number, state: StationState): 
   });
 }
 
-/** Words at the end of the screen for spans that leave it. */
-function leavers(names: readonly string[], lineX: number, y: number, verb: 'to' | 'from'): Piece | null {
+/** Spans that leave the screen, drawn as one to its edge, where words say where they go. */
+function leavers(
+  names: readonly string[],
+  lineX: number,
+  from: number,
+  edge: { readonly y: number; readonly wordsY: number },
+  used: boolean,
+): Piece | null {
   const [first] = names;
   if (first === undefined) return null;
-  const more = names.length > 1 ? `, ${String(names.length - 1)} more` : '';
-  return label(lineX - 8, y, `${verb} ${first}${more}`, { anchor: 'end', size: letters.drawing, halo: true });
+  const words = [`${used ? 'from' : 'to'} ${first}`];
+  if (names.length > 1) words.push(`${String(names.length - 1)} more`);
+  // A narrow band takes the words on two lines.
+  const whole = words.join(', ');
+  const lines = textWidth(whole, letters.drawing) > lineX - 10 ? words : [whole];
+  const out = Math.min(bulge(Math.abs(edge.y - from)), Math.max(8, lineX - 4));
+  return g(
+    {},
+    el('path', {
+      d: `M${num(lineX)},${num(from)}C${num(lineX - out)},${num(from + (edge.y - from) * 0.2)} ${num(lineX - out)},${num(from + (edge.y - from) * 0.6)} ${num(lineX - out)},${num(edge.y)}`,
+      fill: 'none',
+      stroke: colours.ink,
+      'stroke-width': pens.thin,
+      'stroke-dasharray': used ? undefined : '4 3',
+    }),
+    lines.map((line, i) =>
+      label(lineX - 8, edge.wordsY + (used ? i : i + 1 - lines.length) * 13, line, {
+        anchor: 'end',
+        halo: true,
+      }),
+    ),
+  );
 }
 
 /** The station line in its band, to be laid over the left of the sheet. */
@@ -159,8 +186,10 @@ export function stationLine(input: StationLineInput): Piece {
         uses.seen.map(([, y]) => span(lineX, at, y, true)),
         usedBy.seen.map(([, y]) => span(lineX, at, y, false)),
         el('circle', { cx: lineX, cy: at, r: 5, fill: colours.ink }),
-        view !== undefined && leavers(uses.gone, lineX, view.top + 14, 'from'),
-        view !== undefined && leavers(usedBy.gone, lineX, view.bottom - 8, 'to'),
+        view !== undefined &&
+          leavers(uses.gone, lineX, at, { y: view.top + 18, wordsY: view.top + 14 }, true),
+        view !== undefined &&
+          leavers(usedBy.gone, lineX, at, { y: view.bottom - 20, wordsY: view.bottom - 8 }, false),
       ],
     ],
     'img',

@@ -1,5 +1,5 @@
 import type { AppraisedOption, Foundation, Site, Support } from '../model.ts';
-import { groundLevel, roadLevel, soffitLevel } from './alongOption.ts';
+import { groundLevel, placedUnits, roadLevel, slabLevel, soffitLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
@@ -97,6 +97,23 @@ function foundationPiece(foundation: Foundation, atM: number, frame: Frame, styl
   return g({}, parts);
 }
 
+/** Level down to which the structure itself reaches at a support, m: the foot of a pylon leg drawn with its deck; Infinity where none is. */
+function drawnDownTo(site: Site, option: AppraisedOption, chainageM: number): number {
+  let lowest = Infinity;
+  for (const { design, fromM } of placedUnits(option)) {
+    for (const shape of design.elevation) {
+      if (!shape.part.startsWith('pylon') && !shape.part.startsWith('tower')) continue;
+      const xs = shape.points.map(([x]) => fromM + x);
+      if (Math.min(...xs) - 0.5 > chainageM || Math.max(...xs) + 0.5 < chainageM) continue;
+      lowest = Math.min(
+        lowest,
+        slabLevel(site, option, chainageM) + Math.min(...shape.points.map(([, z]) => z)),
+      );
+    }
+  }
+  return lowest;
+}
+
 function pier(
   site: Site,
   option: AppraisedOption,
@@ -107,24 +124,25 @@ function pier(
   const foundation = likeliest(support);
   const at = support.chainageM;
   const half = support.shaft.lengthM / 2;
-  const foot = foundation?.footing.topLevelM ?? support.groundLevelM;
+  const foot =
+    style.foundations === false
+      ? support.groundLevelM
+      : (foundation?.footing.topLevelM ?? support.groundLevelM);
   const soffit = soffitLevel(site, option, at);
-  const gap = Number.isFinite(soffit) ? soffit - support.topLevelM : 0;
+  const legFoot = drawnDownTo(site, option, at);
+  const isLeg = Number.isFinite(legFoot);
+  const top = Math.min(support.topLevelM, legFoot);
+  const gap = Number.isFinite(soffit) && !isLeg ? soffit - support.topLevelM : 0;
   const bearing = Math.min(half, 0.6);
   return g(
-    {},
+    { 'data-support': option.supports.indexOf(support) },
     style.foundations !== false && foundation !== null && foundationPiece(foundation, at, frame, style),
-    el('path', {
-      d: box(
-        frame,
-        at - half,
-        at + half,
-        support.topLevelM,
-        style.foundations === false ? support.groundLevelM : foot,
-      ),
-      fill: colours.sheet,
-      'stroke-width': pens.thin,
-    }),
+    top > foot + 0.02 &&
+      el('path', {
+        d: box(frame, at - half, at + half, top, foot),
+        fill: colours.sheet,
+        'stroke-width': pens.thin,
+      }),
     gap > 0.05 &&
       gap < 3 &&
       el('path', {

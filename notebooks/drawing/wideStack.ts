@@ -51,12 +51,28 @@ function title(shared: StackSheet, option: AppraisedOption, y: number, room: num
   );
 }
 
-/** P50 left, range, price per m2, interval on the common axis and the chance within the budget. */
+/** P50 and range over the interval on the common axis, price per m2 and the chance within the budget under it. */
 function figures(shared: StackSheet, option: AppraisedOption, left: number, right: number, y: number): Piece {
   const { input, axis, unit, ink } = shared;
   const reference = input.reference === option.number;
   const { p10, p50, p90 } = option.cost;
   const within = input.standing.within[option.number];
+  const limit = input.budget === null ? NaN : axis.x(input.budget);
+  const second = { fill: colours.second, halo: true } as const;
+  // Words step aside where the budget line would run through them: to its right where there is room, else to its left.
+  const atRight = (text: string, baseline: number, size: number, from: number): Piece => {
+    const width = textWidth(text, size);
+    const home = right - width;
+    const crossed = limit > home - 5 && limit < right + 5;
+    const x = !crossed
+      ? home
+      : limit + 6 + width <= right + 0.5
+        ? limit + 6
+        : limit - 6 - width >= from
+          ? limit - 6 - width
+          : home;
+    return label(x, baseline, text, { size, ...second });
+  };
   const price = `${significant(option.pricePerM2.withApproaches, 2)} ${currencySign(input.currency)}/m²`;
   return g(
     { class: 'figures' },
@@ -65,25 +81,21 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
       weight: reference ? 600 : 400,
       halo: true,
     }),
-    label(
-      right - textWidth('88 888 €/m²', letters.table) - 4,
-      y,
-      `${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}`,
-      { size: letters.table, fill: colours.second, anchor: 'end', halo: true },
-    ),
-    label(right, y, price, { size: letters.table, fill: colours.second, anchor: 'end', halo: true }),
+    atRight(`${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}`, y, letters.table, left + 44),
     el('path', {
       d: `M${num(left)},${num(y + 16)}H${num(right)}`,
       stroke: colours.grid,
       'stroke-width': pens.fine,
     }),
     interval(option, axis.x, y + 16, ink),
+    label(left, y + 37, price, { size: letters.table, ...second }),
     within !== undefined &&
-      label(right, y + 36, `${odds(within)} % chance within budget`, {
-        fill: colours.second,
-        anchor: 'end',
-        halo: true,
-      }),
+      atRight(
+        `${odds(within)} % within budget`,
+        y + 37,
+        letters.drawing,
+        left + textWidth(price, letters.table) + 10,
+      ),
   );
 }
 

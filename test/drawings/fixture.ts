@@ -941,7 +941,7 @@ export const options: readonly AppraisedOption[] = [
   }),
 ];
 
-export const budget = 11.5e6;
+export const budget: number = 11.5e6;
 
 export const standing: Standing = {
   leader: 2,

@@ -22,20 +22,47 @@ import { stationLine } from '../../../notebooks/drawing/stationLine.ts';
 import type { HtmlChild } from '../../../notebooks/html.ts';
 import { h } from '../../../notebooks/html.ts';
 import type { Paper } from '../../../notebooks/drawing/ink.ts';
-import { budget, obstacles, options, site, standing } from '../fixture.ts';
+import lowFerry from '../../../data/examples/low-ferry.json?raw';
+import { appraise, readStudy } from '../../../lib/index.ts';
+import * as invented from '../fixture.ts';
 import { checks, depthPoints, measures, published, spanRows } from '../figures.ts';
 
 const asked = new URLSearchParams(location.search);
+/** `?study` shows the worked example as it is worked out; otherwise the figures drawn up by hand. */
+function worked(): Omit<typeof invented, 'options'> & { options: typeof invented.options } {
+  const read = readStudy(lowFerry);
+  if (!read.ok) throw new RangeError(JSON.stringify(read.problems));
+  const study = read.value;
+  const appraisal = appraise(study);
+  const money = study.brief.budget === 'unknown' ? invented.budget : study.brief.budget.amount;
+  return {
+    site: appraisal.site,
+    options: appraisal.options,
+    standing: appraisal.standing,
+    obstacles: study.brief.obstacles,
+    budget: money,
+  };
+}
+const { budget, obstacles, options, site, standing } = asked.has('study') ? worked() : invented;
 const paper = (asked.get('paper') ?? 'colour') as Paper;
 const viewport = document.documentElement.clientWidth;
 const band = viewport < 700 ? 28 : viewport < 1180 ? 118 : 168;
 const outer = viewport < 700 ? 14 : viewport < 1180 ? 24 : viewport < 1408 ? 32 : 48;
 const body = Math.min(980, viewport - band - outer);
 const wide = viewport < 1408 ? body : 1224;
-const option = options[1]!;
+const option = options.find((one) => one.number === (asked.has('study') ? standing.leader : 2))!;
+const measured = asked.has('study')
+  ? [
+      {
+        name: 'Programme, months',
+        places: 0,
+        values: Object.fromEntries(options.map((one) => [one.number, one.months])),
+      },
+    ]
+  : measures;
 const sorted = byCost(options);
-const shared = { options: sorted, reference: 2, paper };
-let reference = 2;
+const shared = { options: sorted, reference: option.number, paper };
+let reference = option.number;
 
 const cell = (name: string, content: HtmlChild, notes: HtmlChild = null, isWide = false): HTMLElement =>
   h(
@@ -140,7 +167,7 @@ const sheetElement = h(
           ['Loading', 'EN 1991-2, LM1'],
           ['Levels', 'm above local datum'],
           ['Stage', 'option study; not for construction'],
-        ].map(([a, b]) => h('tr', {}, h('th', { scope: 'row' }, a!), h('td', {}, b!))),
+        ].map(([a, b]) => h('tr', {}, h('th', { scope: 'row' }, a), h('td', {}, b))),
       ),
     ),
   ),
@@ -312,10 +339,24 @@ const sheetElement = h(
             paper,
           }),
         ),
-        h('div', {}, checkBars({ form: 'composite-i', checks, widthPx: Math.min(290, body), paper })),
+        h(
+          'div',
+          {},
+          checkBars({
+            form: option.form,
+            checks: asked.has('study') ? option.designs[0]!.checks : checks,
+            widthPx: Math.min(300, body),
+            paper,
+          }),
+        ),
       ),
     ),
-    cell('5+020', sectionRow({ options: sorted, reference: 2, widthPx: wide, paper }), null, true),
+    cell(
+      '5+020',
+      sectionRow({ options: sorted, reference: option.number, widthPx: wide, paper }),
+      null,
+      true,
+    ),
   ),
   part(
     6,
@@ -323,7 +364,7 @@ const sheetElement = h(
     'Per m² of deck. Hatched behind each mark: what has been published for that form at that span.',
     cell(
       '6+010',
-      quantityMarks({ ...shared, widthPx: body, published }),
+      quantityMarks({ ...shared, widthPx: body, published: asked.has('study') ? {} : published }),
       h('p', {}, 'Bands from memory are drawn wider.'),
     ),
   ),
@@ -358,7 +399,7 @@ const sheetElement = h(
     8,
     'Programme, carbon, upkeep',
     'Option 2 is first on time.',
-    cell('8+010', rangePanels({ ...shared, measures, widthPx: body })),
+    cell('8+010', rangePanels({ ...shared, measures: measured, widthPx: body })),
   ),
   part(
     9,
@@ -366,7 +407,7 @@ const sheetElement = h(
     'Nothing beats option 2 on cost.',
     cell(
       '9+010',
-      tradeOffs({ ...shared, measures: [...measures, measures[0]!], budget, currency: 'EUR', widthPx: wide }),
+      tradeOffs({ ...shared, measures: measured, budget, currency: 'EUR', widthPx: wide }),
       null,
       true,
     ),
@@ -380,7 +421,7 @@ const sheetElement = h(
       h(
         'div',
         { class: 'across' },
-        ranking({ options: sorted, standing, budget, currency: 'EUR', reference: 2, paper }),
+        ranking({ options: sorted, standing, budget, currency: 'EUR', reference: option.number, paper }),
       ),
       null,
       true,
