@@ -3,6 +3,7 @@ import type { HtmlChild } from '../html.ts';
 import type { Cell, Graph, Progress, State, Uses, Values } from '../reactive/index.ts';
 import { exchange } from './exchange.ts';
 import type { Frames } from './frames.ts';
+import { lateness } from './lateness.ts';
 import type { Way } from './refusal.ts';
 import { waysOn } from './refusal.ts';
 import type { StationState } from '../drawing/stationLine.ts';
@@ -68,9 +69,6 @@ export interface CellHost {
   readonly end: () => void;
 }
 
-/** A pause shorter than this is not worth a mark, ms. */
-const MARK_AFTER_MS = 150;
-
 const clock = (date: Date): string =>
   [date.getHours(), date.getMinutes(), date.getSeconds()]
     .map((part) => String(part).padStart(2, '0'))
@@ -119,8 +117,6 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   let isOwed = false;
   let bodyError: unknown;
   let paper: Room | null = null;
-  let late: ReturnType<typeof setTimeout> | undefined;
-  let isLate = false;
   const stops: (() => void)[] = [];
 
   const stationState = (): StationState => {
@@ -129,7 +125,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       const home = page.homeOf(state.raisedBy) ?? station;
       return home === station ? 'failed' : 'held';
     }
-    return state.state === 'pending' && isLate ? 'pending' : 'done';
+    return state.state === 'pending' && late.isLate() ? 'pending' : 'done';
   };
 
   const drawPart = (target: HTMLElement, part: Part<U>, values: Values<U>, room: Room): boolean => {
@@ -163,17 +159,20 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     failure.replaceChildren(h('p', { class: 'failure' }, words), ...waysOn(ways));
   };
 
+  const pendingWords = (): string => {
+    const other = progress === undefined ? page.waitsFor(station) : undefined;
+    return other === undefined ? progressWords(progress) : `waits for ${other}`;
+  };
+  const heldWords = (): string => {
+    const failed = state.state === 'failed' ? page.homeOf(state.raisedBy) : undefined;
+    return `held at the last good figures${failed === undefined ? '' : `, because ${failed} has failed`}`;
+  };
+
   const say = (now: StationState): void => {
     if (now === 'failed') sayFailure();
     else failure.replaceChildren();
     const since = drawn === undefined || drawnAt === undefined ? '' : `; drawn as of ${clock(drawnAt)}`;
-    const other = now === 'pending' || now === 'held' ? page.waitsFor(station) : undefined;
-    const words =
-      now === 'held'
-        ? `held at the last good figures${other === undefined ? '' : `; waits for ${other}`}`
-        : now === 'pending'
-          ? `${other === undefined || progress !== undefined ? progressWords(progress) : `waits for ${other}`}${since}`
-          : '';
+    const words = now === 'held' ? heldWords() : now === 'pending' ? `${pendingWords()}${since}` : '';
     if (status.textContent !== words) status.textContent = words;
   };
 
@@ -189,20 +188,12 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     page.changed();
   };
   const updateSoon = (): void => frames.request(update);
+  const late = lateness(updateSoon);
 
   const show = (next: State<Values<U>>): void => {
     state = next;
-    if (next.state === 'pending') {
-      late ??= setTimeout(() => {
-        isLate = true;
-        updateSoon();
-      }, MARK_AFTER_MS);
-    } else {
-      clearTimeout(late);
-      late = undefined;
-      isLate = false;
-      progress = undefined;
-    }
+    late.set(next.state === 'pending');
+    if (next.state !== 'pending') progress = undefined;
     updateSoon();
   };
 
@@ -240,7 +231,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       updateSoon();
     },
     end() {
-      clearTimeout(late);
+      late.end();
       for (const stop of stops) stop();
     },
   };

@@ -5,8 +5,9 @@ import { choiceInput } from './choiceInput.ts';
 import type { FigureSpec, Origin } from './figureInput.ts';
 import { figureInput } from './figureInput.ts';
 import type { Figure } from './figureText.ts';
+import { writeFigure } from './figureText.ts';
 import type { Path } from './place.ts';
-import { getAt, isWithin, putAt } from './place.ts';
+import { getAt, hasAt, isWithin, putAt } from './place.ts';
 import type { Way } from './refusal.ts';
 import type { StudyStore } from './store.ts';
 
@@ -26,6 +27,8 @@ export interface Fields {
     path: Path,
     spec: Omit<ChoiceSpec<T>, Bound> & FieldOptions,
   ) => HTMLElement;
+  /** Those problems that no field here says: to be said elsewhere on the page. */
+  readonly unsaid: (problems: readonly Problem[]) => readonly Problem[];
   /** Takes all fields out of step. */
   readonly end: () => void;
 }
@@ -38,30 +41,35 @@ export interface Fields {
 export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem) => string): Fields {
   const stops: (() => void)[] = [];
 
+  const tied: Path[] = [];
+
   interface Shown {
     readonly set: (value: never, origin: Origin) => void;
     readonly refuse: (words: string | null, ways?: readonly Way[]) => void;
+    /** A value as the field writes it. */
+    readonly words: (value: never) => string;
   }
   const tie = (path: Path, shown: Shown, { isPreset }: FieldOptions): void => {
-    let wrong: readonly Problem[] = [];
-    const undo: Way = { words: 'Undo', take: () => store.undo() };
+    tied.push(path);
+    let isRefused = false;
+    const back = (): Way[] => {
+      if (!hasAt(store.valid(), path)) return [];
+      const good = getAt(store.valid(), path);
+      const take = (): void => {
+        store.edit((study) => putAt(study, path, good), { what: 'going back' });
+      };
+      return [{ words: `Back to ${shown.words(good as never)}`, take }];
+    };
     stops.push(
       graph.view({ draft: store.draft, problems: store.problems }, (state) => {
-        if (state.state !== 'ready') return;
+        if (state.state !== 'ready' || !hasAt(state.value.draft, path)) return;
         const { draft, problems } = state.value;
-        // The list this field stands in may have been shortened under it.
-        let value: unknown;
-        try {
-          value = getAt(draft, path);
-        } catch {
-          return;
-        }
-        shown.set(value as never, isPreset?.(draft) === true ? 'preset' : 'typed');
+        shown.set(getAt(draft, path) as never, isPreset?.(draft) === true ? 'preset' : 'typed');
         const mine = problems.filter((problem) => isWithin(problem.path, path));
-        if (mine.length === 0 && wrong.length === 0) return;
-        wrong = mine;
-        const words = mine.map(say).join(' ');
-        shown.refuse(mine.length === 0 ? null : `${words} The last valid study is kept.`, [undo]);
+        if (mine.length > 0) {
+          shown.refuse(`${mine.map(say).join(' ')} The last valid study is kept.`, back());
+        } else if (isRefused) shown.refuse(null);
+        isRefused = mine.length > 0;
       }),
     );
   };
@@ -83,7 +91,9 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
         input: put(path, spec.label),
         change: store.endStep,
       });
-      tie(path, figure, isPreset === undefined ? {} : { isPreset });
+      const words = (value: Figure): string =>
+        writeFigure(value === 'unknown' ? value : value * (spec.per ?? 1), spec);
+      tie(path, { ...figure, words }, isPreset === undefined ? {} : { isPreset });
       return figure.element;
     },
     choice(path, { isPreset, ...spec }) {
@@ -97,9 +107,12 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
           store.endStep();
         },
       });
-      tie(path, choice, isPreset === undefined ? {} : { isPreset });
+      const words = (value: string): string =>
+        spec.choices.find((one) => one.value === value)?.words ?? value;
+      tie(path, { ...choice, words }, isPreset === undefined ? {} : { isPreset });
       return choice.element;
     },
+    unsaid: (problems) => problems.filter((problem) => !tied.some((path) => isWithin(problem.path, path))),
     end() {
       for (const stop of stops.splice(0)) stop();
     },

@@ -71,6 +71,9 @@ export function figureInput(spec: FigureSpec): FigureInput {
   let isTold = false;
   let isTyping = false;
   let isRefused = false;
+  let isDragged = false;
+  /** After a drag a press takes the whole figure again; otherwise a second press puts the caret. */
+  let isReleased = false;
   let pause: ReturnType<typeof setTimeout> | undefined;
 
   const field = h('span', {
@@ -111,7 +114,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
     const words = writeFigure(shown, spec);
     if (field.textContent !== words) {
       field.textContent = words;
-      if (hasFocus()) selectAll();
+      if (hasFocus() && !isDragged) selectAll();
     }
     dress();
   };
@@ -159,11 +162,11 @@ export function figureInput(spec: FigureSpec): FigureInput {
     const marks = spec.marks?.() ?? [];
     const piece = figureScale({ before: start, now: shown, step: stepNow, rules: spec, marks });
     below.replaceChildren(toDom(piece, field.ownerDocument));
-    element.classList.add('held');
+    element.classList.add('grasped');
   };
   const hideScale = (): void => {
     below.replaceChildren();
-    element.classList.remove('held');
+    element.classList.remove('grasped');
     if (unknown !== undefined && shown !== 'unknown' && hasFocus()) offerUnknown();
   };
   const offerUnknown = (): void => {
@@ -224,7 +227,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
   };
 
   field.addEventListener('focus', () => {
-    selectAll();
+    if (!isDragged) selectAll();
     hideScale();
   });
   field.addEventListener('blur', () => {
@@ -233,6 +236,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
   });
   field.addEventListener('input', () => {
     isTyping = true;
+    isReleased = false;
     clearTimeout(pause);
     pause = setTimeout(() => takeTyped(false), PAUSE_MS);
   });
@@ -267,6 +271,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
     may: () => !isTyping,
     start() {
       unrefuse();
+      isDragged = true;
       anchor = { value: start(), dx: 0, by: step };
       field.focus({ preventScroll: true });
     },
@@ -280,17 +285,25 @@ export function figureInput(spec: FigureSpec): FigureInput {
       showScale(by);
     },
     end() {
+      isDragged = false;
+      isReleased = true;
       keep();
       write();
+      selectAll();
     },
-    cancel: goBack,
+    cancel() {
+      isDragged = false;
+      goBack();
+    },
     tap() {
       if (!hasFocus()) field.focus();
+      else if (isReleased) selectAll();
+      isReleased = false;
     },
   });
   // A press takes the focus on release: until then it may become a drag.
   field.addEventListener('mousedown', (event) => {
-    if (!isTyping && !hasFocus()) event.preventDefault();
+    if (!isTyping && (isReleased || !hasFocus())) event.preventDefault();
   });
 
   write();

@@ -1,6 +1,7 @@
 import { fixed } from '../format.ts';
-import { colours, pens } from '../drawing/ink.ts';
+import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
+import { textWidth } from '../drawing/lettering.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, num } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
@@ -58,11 +59,22 @@ export function figureScale({ before, now, step, rules, marks = [] }: FigureScal
       stroke: colours.ink,
       'stroke-width': pens.thin,
     });
+  const ends = shown.map(
+    ({ words, value }) => textWidth(`${fixed(value, rules.places)}: ${words}`, letters.drawing) + 14,
+  );
   return sheet(
     1,
     52,
     'scale',
     [
+      // The scale lies over what stands below: a piece of clean sheet under it.
+      el('rect', {
+        x: x(first) - 18,
+        y: 4,
+        width: x(last) - x(first) + 36 + Math.max(0, ...ends),
+        height: 46,
+        fill: colours.sheet,
+      }),
       el('path', {
         d: `M${num(x(first))},${num(BASE)}H${num(x(last))}`,
         stroke: colours.ink,

@@ -14,6 +14,16 @@ export function getAt(root: unknown, path: Path): unknown {
   }, root);
 }
 
+/** Whether a path leads anywhere, e.g. to an entry of a list that may have become shorter. */
+export function hasAt(root: unknown, path: Path): boolean {
+  let value = root;
+  return path.every((key) => {
+    if (typeof value !== 'object' || value === null || !(key in value)) return false;
+    value = (value as Record<string | number, unknown>)[key];
+    return true;
+  });
+}
+
 /** The same data with another value at a path; what does not lie on the path is kept as it is. Throws like `getAt`. */
 export function putAt<T>(root: T, path: Path, value: unknown): T {
   const put = (part: unknown, i: number): unknown => {

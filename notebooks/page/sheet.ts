@@ -5,6 +5,7 @@ import type { CellHost, CellSpec, Explained } from './cellHost.ts';
 import { cellHost } from './cellHost.ts';
 import { exchange } from './exchange.ts';
 import { frames } from './frames.ts';
+import { lateness } from './lateness.ts';
 import type { LineSection } from './stationLines.ts';
 import { stationLines } from './stationLines.ts';
 import type { Station } from './ties.ts';
@@ -130,6 +131,7 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
   };
 
   const onPaper = (isPaper: boolean) => (): void => {
+    lines.setPaper(isPaper);
     for (const host of hosts()) {
       const wide = host.element.classList.contains('wide');
       host.setPaper(isPaper ? { widthPx: wide ? PAPER.wide : PAPER.body } : null);
@@ -142,8 +144,9 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
       const part = h('span', { class: 'live' });
       let state: State<Values<typeof uses>> = { state: 'pending' };
       let shown: unknown;
+      const late = lateness(() => queue.request(draw));
       const draw = (): void => {
-        part.classList.toggle('pending', state.state !== 'ready');
+        part.classList.toggle('pending', state.state === 'failed' || late.isLate());
         if (!('value' in state) || state.value === shown) return;
         shown = exchange(part, h('span', {}, show(state.value))) ? state.value : undefined;
       };
@@ -151,8 +154,10 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
       stops.push(
         graph.view(uses, (next) => {
           state = next;
+          late.set(next.state === 'pending');
           queue.request(draw);
         }),
+        late.end,
       );
       return part;
     },
@@ -173,7 +178,7 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
         h('h2', { id: `s${number}-title` }, post, ' ', name),
         cells.map((host) => host.element),
       );
-      return { number, title, element: section, post, hosts: cells };
+      return { number, title, element: section, hosts: cells };
     },
 
     mount(root, spec) {

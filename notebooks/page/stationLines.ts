@@ -12,8 +12,6 @@ export interface LineSection {
   readonly number: number;
   readonly title: string;
   readonly element: HTMLElement;
-  /** The number beside the line. */
-  readonly post: HTMLElement;
   readonly hosts: readonly CellHost[];
 }
 
@@ -24,17 +22,19 @@ export interface StationLines {
   readonly flat: HTMLElement;
   /** Draws both anew in the next frame. */
   readonly redraw: () => void;
+  /** On paper nothing is pointed at. */
+  readonly setPaper: (isPaper: boolean) => void;
   readonly end: () => void;
 }
 
 const pixels = (element: Element, property: string): number =>
   parseFloat(getComputedStyle(element).getPropertyValue(property));
 
-/** Middle of an element, px down from the top of the sheet. */
-const middleOf = (element: Element, sheet: Element): number => {
-  const { top, height } = element.getBoundingClientRect();
-  return top + height / 2 - sheet.getBoundingClientRect().top;
-};
+/** Top and middle of an element, px down from the top of the sheet. */
+const topOf = (element: Element, sheet: Element): number =>
+  element.getBoundingClientRect().top - sheet.getBoundingClientRect().top;
+const middleOf = (element: Element, sheet: Element): number =>
+  topOf(element, sheet) + element.getBoundingClientRect().height / 2;
 
 /**
  * Both lines of a page. Pointing at a cell, or having the focus in it, draws the spans to what it uses and to what
@@ -54,12 +54,14 @@ export function stationLines(
   let focused: string | undefined;
   let joined: ({ readonly at: string } & Ties) | undefined;
   let drawnFlat = '';
+  let isPaper = false;
 
   const hosts = (): CellHost[] => sections().flatMap((section) => section.hosts);
 
   const marks = (): StationMark[] =>
-    sections().flatMap(({ number, post, hosts: cells }) => [
-      { name: String(number), y: middleOf(post, sheet), post: true },
+    sections().flatMap(({ number, element, hosts: cells }) => [
+      // The post stands level with the rule over the section.
+      { name: String(number), y: topOf(element, sheet), post: true },
       ...cells.map((host) => ({
         name: host.station,
         y: middleOf(host.label, sheet),
@@ -110,7 +112,7 @@ export function stationLines(
   const redraw = (): void => frames.request(drawNow);
 
   const join = (): void => {
-    const at = pointed ?? focused;
+    const at = isPaper ? undefined : (pointed ?? focused);
     if (at === joined?.at) return;
     const tied = at === undefined ? undefined : ties().get(at);
     joined = at === undefined || tied === undefined ? undefined : { at, ...tied };
@@ -162,6 +164,10 @@ export function stationLines(
     upright,
     flat,
     redraw,
+    setPaper(next) {
+      isPaper = next;
+      join();
+    },
     end() {
       listening.abort();
       watcher.disconnect();
