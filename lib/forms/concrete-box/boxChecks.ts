@@ -5,7 +5,7 @@ import { check } from '../common/checks.ts';
 import { boxData } from './boxData.ts';
 import { boxService } from './boxService.ts';
 import type { BoxModel } from './boxModel.ts';
-import type { Compression } from './boxStress.ts';
+import type { StressUse } from './boxStress.ts';
 import { mostStrandsPerWeb } from './findTendons.ts';
 import type { BendingUse } from './ultimateBending.ts';
 import type { SizedBox } from './sizeBox.ts';
@@ -38,11 +38,12 @@ export function boxChecks(model: BoxModel, box: SizedBox): Check[] {
     ),
     bending('bending-spans', 'bending in the spans', tendons.sag),
     ...(continuous ? [bending('bending-piers', 'bending over the piers', tendons.hog)] : []),
-    compression('compression-spans', 'compression of the soffit in the spans', compressions.spanSoffit),
+    stress('compression-spans', 'compression of the soffit in the spans', compressions.spanSoffit),
     ...(continuous
-      ? [compression('compression-piers', 'compression of the soffit at the piers', compressions.pierSoffit)]
+      ? [stress('compression-piers', 'compression of the soffit at the piers', compressions.pierSoffit)]
       : []),
-    compression('compression-top', 'compression of the top slab', compressions.top),
+    stress('compression-top', 'compression of the top slab', compressions.top),
+    stress('stressing', 'tension of the concrete on the day of stressing', compressions.freshTension),
     check(
       'web-struts',
       'shear and torsion: struts of the outer web',
@@ -87,7 +88,7 @@ function bending(id: string, label: string, use: BendingUse): Check {
   return check(id, label, use.demandKNm, use.capacityKNm, 'kNm');
 }
 
-function compression(id: string, label: string, { stressMPa, limitMPa }: Compression): Check {
+function stress(id: string, label: string, { stressMPa, limitMPa }: StressUse): Check {
   return check(id, label, stressMPa, limitMPa, 'MPa');
 }
 

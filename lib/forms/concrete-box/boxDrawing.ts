@@ -24,20 +24,19 @@ export function boxElevation(model: BoxModel, box: SizedBox): Shape[] {
     const inner = j > 0 && j < last;
     const at = j === 0 ? endM / 2 : j === last ? lengthM - endM / 2 : x;
     shapes.push(upright('diaphragm', 'concrete', along, at, layout.slab.midM, inner ? pierM : endM));
-    // Spans are cast to a joint a fifth of the span past the pier.
-    if (inner)
-      shapes.push(
-        upright(
-          'construction joint',
-          'concrete',
-          along,
-          x + boxData.pierZone.overSpan * task.spansM[j]!,
-          0,
-          0.02,
-        ),
-      );
   });
+  for (const x of jointsOf(model)) shapes.push(upright('construction joint', 'concrete', along, x, 0, 0.02));
   return shapes;
+}
+
+/** Where casting stops: a fifth of the span past each pier on falsework, every half span of a launched deck. */
+function jointsOf({ task, supportsM, lengthM }: BoxModel): number[] {
+  if (task.method === 'launch') {
+    const segmentM = Math.max(...task.spansM) / 2;
+    const count = Math.max(1, Math.round(lengthM / segmentM));
+    return Array.from({ length: count - 1 }, (_, i) => (lengthM * (i + 1)) / count);
+  }
+  return supportsM.slice(1, -1).map((x, j) => x + boxData.pierZone.overSpan * task.spansM[j + 1]!);
 }
 
 /** Middle line of the draped tendons. */

@@ -73,7 +73,7 @@ export function boxModel(task: UnitTask): BoxModel {
 /** Thickness rounded up to the step of drawings, m. */
 export function roundUp(thicknessM: number): number {
   const step = boxData.stepM.value;
-  return Math.ceil(thicknessM / step - 1e-6) * step;
+  return Number((Math.ceil(thicknessM / step - 1e-6) * step).toFixed(6));
 }
 
 function shareOfSupports(

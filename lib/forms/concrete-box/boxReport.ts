@@ -4,37 +4,24 @@ import { strandKg } from './boxLines.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SizedBox } from './sizeBox.ts';
 
-/** Characteristic reactions of the whole deck: own weight with diaphragms, superimposed load, parasitic part of the tendons. */
+/**
+ * Characteristic reactions of the whole deck: own weight with diaphragms, superimposed load, traffic. The parasitic part
+ * of the tendons adds up to nothing and is left out: it relieves the piers and presses the ends down, and both would then
+ * hang on the drape.
+ */
 export function boxReactions(model: BoxModel, box: SizedBox): SupportReaction[] {
   const { most } = model.traffic;
   const gamma = model.standard.unitWeights.concreteKNm3;
-  const parasitic = parasiticReactions(model, box);
   const last = model.supportsM.length - 1;
   // At the two ends the reaction is the shear beside it.
   const end = (j: number): number =>
     j === 0 ? most.shearMaxKN[0]! : j === last ? -most.shearMinKN[most.shearMinKN.length - 1]! : 0;
   return model.supportsM.map((_, j) => ({
     permanentKN:
-      box.own.effects.reactionKN[j]! +
-      model.superimposed.reactionKN[j]! +
-      gamma * box.own.diaphragmM3[j]! +
-      parasitic[j]!,
+      box.own.effects.reactionKN[j]! + model.superimposed.reactionKN[j]! + gamma * box.own.diaphragmM3[j]!,
     trafficMaxKN: Math.max(most.reactionMaxKN[j]!, end(j)),
     trafficMinKN: most.reactionMinKN[j]!,
   }));
-}
-
-/** The parasitic moment is straight between supports; its breaks are reactions that add up to nothing. */
-function parasiticReactions(model: BoxModel, box: SizedBox): number[] {
-  const { supportAt, xM } = model.beam;
-  const { parasiticM, forceKN } = box.tendons;
-  const slope = (span: number): number => {
-    const from = supportAt[span];
-    const to = supportAt[span + 1];
-    if (from === undefined || to === undefined) return 0;
-    return (parasiticM[to]! - parasiticM[from]!) / (xM[to]! - xM[from]!);
-  };
-  return supportAt.map((_, j) => forceKN * (slope(j) - slope(j - 1)));
 }
 
 /** Own weight of the governing characteristic moment, 0 to 1. */

@@ -1,11 +1,12 @@
+import { concrete } from '../../actions/index.ts';
 import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { Tendons } from './findTendons.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 
-/** Greatest compression of the concrete in service over its limit, with the stress, MPa. */
-export interface Compression {
+/** Greatest stress of the concrete over its limit, with the stress, MPa. */
+export interface StressUse {
   readonly use: number;
   readonly stressMPa: number;
   readonly limitMPa: number;
@@ -13,9 +14,11 @@ export interface Compression {
 
 /** Compression by place: soffit over piers, soffit in spans, top of the deck. */
 export interface Compressions {
-  readonly pierSoffit: Compression;
-  readonly spanSoffit: Compression;
-  readonly top: Compression;
+  readonly pierSoffit: StressUse;
+  readonly spanSoffit: StressUse;
+  readonly top: StressUse;
+  /** Tension of either face when the tendons have just been stressed, over the tensile strength of that day. */
+  readonly freshTension: StressUse;
 }
 
 /**
@@ -36,8 +39,9 @@ export function boxCompressions(
     total: total * fck,
     transfer: transfer * strengthAtTransfer * fck,
   };
-  const nil: Compression = { use: 0, stressMPa: 0, limitMPa: limits.total };
-  const out = { pierSoffit: nil, spanSoffit: nil, top: nil };
+  const nil: StressUse = { use: 0, stressMPa: 0, limitMPa: limits.total };
+  const young = concrete(model.standardId, strengthAtTransfer * fck).fctmMPa;
+  const out = { pierSoffit: nil, spanSoffit: nil, top: nil, freshTension: { ...nil, limitMPa: young } };
   const note = (place: keyof typeof out, stressKPa: number, limitMPa: number): void => {
     const use = stressKPa / 1e3 / limitMPa;
     if (use > out[place].use) out[place] = { use, stressMPa: stressKPa / 1e3, limitMPa };
@@ -57,6 +61,8 @@ export function boxCompressions(
     note(soffit, axial - lasting / lowW, limits.permanent);
     note(soffit, axial - (lasting + most.momentMinKNm[i]!) / lowW, limits.total);
     note(soffit, freshAxial - fresh / lowW, limits.transfer);
+    note('freshTension', -(freshAxial - fresh / lowW), young);
+    note('freshTension', -(freshAxial + fresh / topW), young);
     note('top', axial + lasting / topW, limits.permanent);
     note('top', axial + (lasting + most.momentMaxKNm[i]!) / topW, limits.total);
     note('top', freshAxial + fresh / topW, limits.transfer);

@@ -98,7 +98,7 @@ export function findTendons(
       parasiticM,
     });
   const wanted = Math.ceil(found.forceKN / perStrandKN / webs - 1e-6);
-  let strandsPerWeb = Math.min(most, Math.max(1, wanted));
+  let strandsPerWeb = Math.min(most, Math.max(boxData.tendons[0]!.strands, wanted));
   let [sag, hog] = bend(strandsPerWeb);
   // The slab over the piers may still have to grow: the first pass does not answer for it with strands.
   while (before && Math.max(sag.use, hog.use) > 1 && strandsPerWeb < most) {
