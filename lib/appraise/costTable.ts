@@ -139,8 +139,8 @@ export interface TableShelf {
   tableFor(asked: FormAndMethod): CostTable;
 }
 
-/** Spans beside a support are told apart to this, m: the cost of a support changes slowly with them. */
-const SPAN_CLASS_M = 10;
+/** Spans beside a support at which it is really sized, every so many m; in between its cost is read off straight lines. */
+const SPAN_STEP_M = 20;
 
 /**
  * What the search knows of cost, made by the real sizing, take-off and mean rates: deck cost and depth of each form
@@ -172,6 +172,19 @@ export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf 
       const high = share > 0 ? value(rows.row(i + 1)) : 0;
       return (1 - share) * low + share * high;
     };
+    /** A pier between two equal spans, at mean rates with the odds of the ground. */
+    const pierCost = (form: FormId, chainageM: number, spanM: number): number => {
+      const key = `${form} ${form === asked.form ? asked.method : ''} ${chainageM} ${spanM}`;
+      const found = piers.get(key);
+      if (found !== undefined) return found;
+      const rows = rowsBy(form);
+      const [i, share] = between(rows.spansM, spanM);
+      const deck = deckOnSupport(rows.row(share > 0.5 ? i + 1 : i).design);
+      const pier = standPierBetween(site, deck, chainageM, spanM, spanM, roadLevel(chainageM));
+      const cost = costOf(expectedLines(pier));
+      piers.set(key, cost);
+      return cost;
+    };
     return {
       deckPerM(form, spanM, governingM) {
         const [i, within] = between(SHARES, governingM > 0 ? spanM / governingM : 1);
@@ -182,18 +195,11 @@ export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf 
       unitFixed: (form, governingM, pylons = 0) =>
         read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),
       support(form, chainageM, spanLeftM, spanRightM) {
-        const on = Math.max(1, Math.round((spanLeftM + spanRightM) / 2 / SPAN_CLASS_M)) * SPAN_CLASS_M;
-        const key = `${form} ${form === asked.form ? asked.method : ''} ${chainageM} ${on}`;
-        const found = piers.get(key);
-        if (found !== undefined) return found;
-        const rows = rowsBy(form);
-        const [i, share] = between(rows.spansM, on);
-        const deck = deckOnSupport(rows.row(share > 0.5 ? i + 1 : i).design);
-        const cost = costOf(
-          expectedLines(standPierBetween(site, deck, chainageM, on, on, roadLevel(chainageM))),
-        );
-        piers.set(key, cost);
-        return cost;
+        const mean = (spanLeftM + spanRightM) / 2;
+        const below = Math.max(1, Math.floor(mean / SPAN_STEP_M));
+        const share = Math.min(1, Math.max(0, mean / SPAN_STEP_M - below));
+        const low = pierCost(form, chainageM, below * SPAN_STEP_M);
+        return share > 0 ? low + share * (pierCost(form, chainageM, (below + 1) * SPAN_STEP_M) - low) : low;
       },
     };
   };

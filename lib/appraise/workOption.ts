@@ -26,7 +26,7 @@ export function mainUnit(units: readonly Unit[]): Unit {
 }
 
 /** Construction depth along the crossing of designs that stand one after another. */
-function depthAlong(site: Site, units: readonly Unit[], designs: readonly Design[]): DepthAlong {
+export function depthAlong(site: Site, units: readonly Unit[], designs: readonly Design[]): DepthAlong {
   const xM: number[] = [];
   const depthM: number[] = [];
   designs.forEach((design, k) => {

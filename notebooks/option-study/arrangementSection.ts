@@ -1,0 +1,107 @@
+import type { Appraisal } from '../../lib/index.ts';
+import { chooseReference, listenToStack, type ChooseReference } from '../drawing/listenToStack.ts';
+import { stack } from '../drawing/stack.ts';
+import { toDom } from '../drawing/toDom.ts';
+import { formLooks } from '../forms/formLook.ts';
+import { fixed } from '../format.ts';
+import { h } from '../html.ts';
+import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
+import type { StudyCells } from './studyCells.ts';
+import { budgetOf } from './words.ts';
+
+const droppedTotal = ({ droppedCounts }: Appraisal): number =>
+  droppedCounts.reduce((sum, dropped) => sum + dropped.count, 0);
+
+/** What was not worked out, by form and reason. */
+function droppedTable(appraisal: Appraisal): HTMLElement {
+  const rows = [
+    ...appraisal.dropped.map(({ form, because }) => ({ form, reason: because.join('; '), count: null })),
+    ...appraisal.droppedCounts,
+  ];
+  return h(
+    'details',
+    { class: 'behind' },
+    h('summary', {}, `The ${fixed(droppedTotal(appraisal), 0)} arrangements dropped, by reason`),
+    h(
+      'table',
+      {},
+      h(
+        'thead',
+        {},
+        h(
+          'tr',
+          {},
+          ['form', 'reason', 'arrangements'].map((word) => h('th', { scope: 'col' }, word)),
+        ),
+      ),
+      h(
+        'tbody',
+        {},
+        rows.map(({ form, reason, count }) =>
+          h(
+            'tr',
+            {},
+            h('th', { scope: 'row' }, formLooks[form].short),
+            h('td', { class: 'text' }, reason),
+            h('td', {}, count === null ? 'form dropped' : fixed(count, 0)),
+          ),
+        ),
+      ),
+    ),
+  );
+}
+
+/** Section 3: every option drawn on one chainage and one scale, with its cost beside it. */
+export function arrangementSection(page: Sheet, store: StudyStore, cells: StudyCells): LineSection {
+  const { appraisal, reference, brief } = cells;
+  const finding = page.live({ appraisal }, (v) => {
+    const kept = v.appraisal.options.length;
+    const dropped = droppedTotal(v.appraisal);
+    return `Of ${fixed(kept + dropped, 0)} arrangements, ${kept} are worked out and ${fixed(dropped, 0)} dropped, each with its reason.`;
+  });
+  const chosen = (event: Event): void => {
+    const { number } = (event as ChooseReference).detail;
+    store.edit((study) => ({ ...study, options: { ...study.options, reference: number } }), {
+      what: 'reference',
+    });
+  };
+  return page.section(3, 'Arrangements', finding, [
+    page.cell({
+      station: '3+010',
+      title: 'How to read the stack',
+      shows: { brief },
+      body: h(
+        'p',
+        { class: 'prose' },
+        'Click an elevation to make it the reference everywhere. Grey bands are barred to supports. All stand on one chainage and one scale.',
+      ),
+    }),
+    page.cell({
+      station: '3+020',
+      title: 'Arrangements',
+      shows: { appraisal, reference, brief },
+      owns: [appraisal, reference],
+      wide: true,
+      long: true,
+      body: (v, room) => {
+        const { site, options, standing, currency } = v.appraisal;
+        const drawing = toDom(
+          stack({
+            site,
+            options,
+            standing,
+            budget: budgetOf(v.brief),
+            currency,
+            reference: v.reference?.number ?? null,
+            widthPx: room.widthPx,
+            prefix: 'stack',
+          }),
+          document,
+        );
+        listenToStack(drawing);
+        drawing.addEventListener(chooseReference, chosen);
+        return [drawing, droppedTable(v.appraisal)];
+      },
+    }),
+  ]);
+}

@@ -1,0 +1,44 @@
+import { ladder } from '../drawing/ladder.ts';
+import { fixed, level } from '../format.ts';
+import { h } from '../html.ts';
+import type { LineSection, Sheet } from '../page/index.ts';
+import type { StudyCells } from './studyCells.ts';
+
+/** Section 4: what stands between the deciding obstacle and the road. */
+export function depthSection(page: Sheet, cells: StudyCells): LineSection {
+  const { site, brief, reference } = cells;
+  const finding = page.live({ reference }, (v) => {
+    const option = v.reference;
+    if (!option?.headroom) return 'Nothing has to be kept clear.';
+    const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
+    const lifted = rise > 0.005 ? `the road rises ${level(rise)} m for it` : 'the road stays where it is';
+    return `${level(option.depthM.midspan)} m of structure leaves ${level(option.headroom.spareM)} m spare; ${lifted}.`;
+  });
+  return page.section(4, 'Depth and level', finding, [
+    page.cell({
+      station: '4+010',
+      title: 'Depth at the obstacle',
+      shows: { site, brief, reference },
+      body: (v) => {
+        const option = v.reference;
+        const at = option?.headroom?.chainageM;
+        const obstacle = v.brief.obstacles.find(
+          ({ clearance }) =>
+            clearance && at !== undefined && at >= clearance.fromM - 0.5 && at <= clearance.toM + 0.5,
+        );
+        if (!option || !obstacle)
+          return h('p', { class: 'prose' }, 'The flood decides, or nothing has to be kept clear.');
+        return ladder({ site: v.site, option, obstacle, prefix: 'ladder' });
+      },
+      notes: (v) =>
+        v.reference?.headroom && [
+          h('p', {}, `At chainage ${fixed(v.reference.headroom.chainageM, 0)}, where least is left.`),
+          h(
+            'p',
+            {},
+            'A free end of the road that rises by Δ adds fill of about (W h + s h²)/g for each metre on its side.',
+          ),
+        ],
+    }),
+  ]);
+}

@@ -1,0 +1,108 @@
+import type { AppraisedOption, Ruling } from '../../lib/index.ts';
+import { optionMark, ranking } from '../charts/ranking.ts';
+import { optionTitle } from '../drawing/optionWords.ts';
+import { fixed } from '../format.ts';
+import { h } from '../html.ts';
+import type { LineSection, Sheet } from '../page/index.ts';
+import type { StudyCells } from './studyCells.ts';
+import { answerWords, budgetOf } from './words.ts';
+
+const effects: readonly Ruling['effect'][] = ['out', 'caution', 'to confirm', 'in favour'];
+
+const flipWords = ({ flip }: Ruling): string =>
+  flip
+    ? ` Turns when ${flip.fact} goes from ${fixed(flip.from, 2)} to ${fixed(flip.to, 2)} ${flip.unit}.`
+    : '';
+
+/** What the rules say of one option, worst first. */
+function rulingsOf(option: AppraisedOption): HTMLElement {
+  const sorted = [...option.rulings].sort((a, b) => effects.indexOf(a.effect) - effects.indexOf(b.effect));
+  return h(
+    'details',
+    { class: 'behind' },
+    h(
+      'summary',
+      {},
+      optionMark(option, null),
+      ` ${optionTitle(option)}: ${option.status}, ${option.rulings.filter((r) => r.effect === 'caution').length} cautions, ${option.rulings.filter((r) => r.effect === 'to confirm').length} to confirm`,
+    ),
+    h(
+      'table',
+      {},
+      h(
+        'tbody',
+        {},
+        sorted.map((ruling) =>
+          h(
+            'tr',
+            {},
+            h(
+              'th',
+              {
+                scope: 'row',
+                class: ruling.effect === 'out' || ruling.effect === 'caution' ? 'limit' : null,
+              },
+              ruling.effect,
+            ),
+            h('td', { class: 'text' }, `${ruling.because.join('; ')}.${flipWords(ruling)}`),
+            h('td', { class: 'text source' }, ruling.source),
+          ),
+        ),
+      ),
+    ),
+  );
+}
+
+/** Section 10: order under the budget, and the rulings behind it. */
+export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
+  const { appraisal, reference, brief } = cells;
+  const finding = page.live({ appraisal }, (v) => v.appraisal.standing.because[0] ?? '');
+  return page.section(10, 'Ranking under the budget', finding, [
+    page.cell({
+      station: '10+010',
+      title: 'Ranking',
+      shows: { appraisal, reference, brief },
+      body: (v) =>
+        ranking({
+          options: v.appraisal.options,
+          standing: v.appraisal.standing,
+          budget: budgetOf(v.brief),
+          currency: v.appraisal.currency,
+          reference: v.reference?.number ?? null,
+        }),
+      notes: (v) => [
+        v.appraisal.standing.because.slice(1).map((words) => h('p', {}, words)),
+        v.appraisal.dropped.map(({ form, because }) => h('p', {}, `${form} dropped: ${because.join('; ')}.`)),
+        h('p', { class: 'source' }, answerWords(v.appraisal)),
+      ],
+    }),
+    page.cell({
+      station: '10+020',
+      title: 'Rulings',
+      shows: { appraisal },
+      body: (v) => v.appraisal.options.map(rulingsOf),
+      notes: [
+        h(
+          'p',
+          {},
+          'Every ruling names its rule, the numbers, the source, and how far the nearest number is from turning it.',
+        ),
+      ],
+    }),
+    page.cell({
+      station: '10+030',
+      title: 'Cautions',
+      shows: { brief },
+      body: h(
+        'div',
+        { class: 'prose' },
+        h(
+          'p',
+          { class: 'caution' },
+          h('b', {}, 'Option stage only; not a design and not for construction.'),
+          ' Sizes are quick checks, not code verification. Temporary works, and stability while launching, lifting and cantilevering, need their own design: box girders have failed in erection. Ground, flood, scour, vessel impact and seismic matters need specialists. Clearances and loads are presets to be confirmed with the authority. A licensed engineer and the local codes decide.',
+        ),
+      ),
+    }),
+  ]);
+}

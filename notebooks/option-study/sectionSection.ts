@@ -1,0 +1,67 @@
+import { checkBars, checkTable } from '../charts/checkBars.ts';
+import { tableBehind } from '../charts/table.ts';
+import { section } from '../drawing/section.ts';
+import { mainDesign, sectionRow } from '../drawing/sectionRow.ts';
+import { fixed } from '../format.ts';
+import { h } from '../html.ts';
+import type { LineSection, Sheet } from '../page/index.ts';
+import type { AppraisedOption } from '../../lib/index.ts';
+import type { StudyCells } from './studyCells.ts';
+
+/** The first option of each form, in order. */
+export function firstOfEachForm(options: readonly AppraisedOption[]): AppraisedOption[] {
+  return [...new Map([...options].reverse().map((option) => [option.form, option])).values()].reverse();
+}
+
+/** Section 5: the cross-section of the reference with its checks, the others beside it. */
+export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
+  const { appraisal, reference } = cells;
+  const finding = page.live({ reference }, (v) =>
+    v.reference
+      ? `Option ${v.reference.number} is governed by ${v.reference.limitingCheck.label}, ${fixed(v.reference.limitingCheck.utilisation, 2)}.`
+      : '',
+  );
+  return page.section(5, 'Section', finding, [
+    page.cell({
+      station: '5+010',
+      title: 'Section of the reference',
+      shows: { reference },
+      body: (v, room) => {
+        const design = v.reference && mainDesign(v.reference);
+        if (!v.reference || !design) return h('p', { class: 'prose' }, 'No option has been worked out.');
+        const checks = {
+          form: v.reference.form,
+          checks: design.checks,
+          widthPx: Math.min(420, room.widthPx),
+          prefix: 'checks',
+        };
+        return [
+          section({ design, widthPx: Math.min(620, room.widthPx), prefix: 'section' }),
+          h('div', { class: 'checks' }, checkBars(checks), tableBehind(checkTable(checks))),
+        ];
+      },
+      notes: [
+        h(
+          'p',
+          { class: 'caution' },
+          h('b', {}, 'Caution.'),
+          ' Quick checks, not code verification. Stability while launching, lifting and cantilevering is not covered.',
+        ),
+      ],
+    }),
+    page.cell({
+      station: '5+020',
+      title: 'Sections side by side',
+      shows: { appraisal, reference },
+      wide: true,
+      body: (v, room) =>
+        sectionRow({
+          options: firstOfEachForm(v.appraisal.options),
+          reference: v.reference?.number ?? null,
+          widthPx: room.widthPx,
+          prefix: 'sections',
+        }),
+      notes: [h('p', {}, 'The cheapest option of each form, on one road level and one scale.')],
+    }),
+  ]);
+}

@@ -1,0 +1,67 @@
+import { describe, expect, it } from 'vitest';
+import { command } from './run.ts';
+
+interface Sized {
+  readonly spans: number[];
+  readonly deckAreaM2: number;
+  readonly perM2: Record<string, number>;
+  readonly quantities: Record<string, number>;
+  readonly checks: { id: string; utilisation: number }[];
+  readonly limitingCheck: string;
+  readonly depthM: { support: number; midspan: number };
+}
+const size = (...args: string[]): Sized => JSON.parse(command('size', ...args).out) as Sized;
+
+describe('size', () => {
+  it('size(composite-i 60,80,60) has 190 to 255 kg/m2 of structural steel, the plates of a twin-girder deck of that span', () => {
+    // Twin-girder decks of the JRC/SETRA worked-example geometry (60-80-60 m, 12 m wide, girder 2.8 m): band from
+    // practice, 0.105 L^1.6 + 100 = 216 kg/m2 at 80 m (from memory) and its usual scatter.
+    const sized = size(
+      '--form',
+      'composite-i',
+      '--spans',
+      '60,80,60',
+      '--width',
+      '12',
+      '--lanes',
+      '3',
+      '--depth',
+      '3.1',
+    );
+    expect(sized.deckAreaM2).toBe(2400);
+    expect(sized.perM2['structuralSteelKg']).toBeGreaterThan(190);
+    expect(sized.perM2['structuralSteelKg']).toBeLessThan(255);
+    expect(sized.quantities['structuralSteelKg']! / 2400).toBeCloseTo(sized.perM2['structuralSteelKg']!, 2);
+    const governing = sized.checks.find((check) => check.id === sized.limitingCheck)!;
+    expect(governing.utilisation).toBe(Math.max(...sized.checks.map((check) => check.utilisation)));
+  }, 30_000);
+
+  it('size(...) without a depth finds one inside the published band', () => {
+    const sized = size('--form', 'composite-i', '--spans', '60,80,60', '--width', '12', '--lanes', '3');
+    expect(sized.depthM.midspan / 80).toBeGreaterThanOrEqual(0.032);
+    expect(sized.depthM.midspan / 80).toBeLessThanOrEqual(0.05);
+  }, 30_000);
+
+  it('size(bad input) is refused with subject, expected, received, place and remedy, exit code 2', () => {
+    const printed = command(
+      'size',
+      '--form',
+      'composite-i',
+      '--spans=-60,80',
+      '--width',
+      'wide',
+      '--lanes',
+      '2',
+    );
+    expect(printed.code).toBe(2);
+    expect(printed.out).toBe('');
+    expect(printed.err).toMatch(/spans: expected .* received -60,80 m \(--spans\)\. give --spans like/);
+    expect(printed.err).toMatch(/width: expected .* received wide/);
+  }, 30_000);
+
+  it('size(form nobody knows) names the forms there are', () => {
+    const printed = command('size', '--form', 'rope', '--spans', '60', '--width', '12', '--lanes', '2');
+    expect(printed.code).toBe(2);
+    expect(printed.err).toContain('composite-i');
+  }, 30_000);
+});
