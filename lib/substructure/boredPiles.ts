@@ -113,6 +113,7 @@ function leastGroup(
         const startM = Math.min(levels.bearingLevelM, levels.scouredLevelM, undersideM);
         const toeLevelM = startM - need;
         const pileLength = undersideM - toeLevelM;
+        if (pileLength > piles.mostDiameters * diameterM) continue;
         const effort = capVolume + n * (pileLength * area + piles.perPileM3);
         if (effort < least) {
           least = effort;

@@ -79,6 +79,7 @@ const schema = z.strictObject({
     tensionShare: figure,
     spacing: figure,
     longestInStratumM: figure,
+    mostDiameters: figure,
     perPileM3: figure,
     capDepthDiameters: figure,
     leastCapDepthM: figure,
