@@ -1,14 +1,14 @@
-import type { Obstacle, Site } from '../model.ts';
-import { groundLevel } from './alongOption.ts';
+import type { AppraisedOption, Obstacle, Site } from '../model.ts';
+import { groundLevel, soffitLevel } from './alongOption.ts';
 import { dimensionChain, uprightDimension } from './dimension.ts';
 import type { Frame } from './frame.ts';
-import { colours, pens } from './ink.ts';
+import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
 import type { Placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num, pathOf } from './piece.ts';
-import { length } from '../format.ts';
+import { length, level } from '../format.ts';
 
 /** An envelope to be kept free. */
 export interface Envelope {
@@ -62,53 +62,88 @@ export function envelopes(site: Site, obstacles?: readonly Obstacle[]): Envelope
     });
 }
 
+/** What is left between an envelope and the soffit, in words, where it is less than a metre; empty otherwise. */
+export function spareWords(site: Site, option: AppraisedOption | null, one: Envelope): string {
+  if (option === null) return '';
+  const places = [0, 0.25, 0.5, 0.75, 1].map((part) => one.fromM + part * (one.toM - one.fromM));
+  const least = Math.min(...places.map((at) => soffitLevel(site, option, at) - one.topLevelM));
+  if (!Number.isFinite(least) || least >= 1) return '';
+  return least < -0.005 ? `${level(-least)} too low` : `${level(least)} spare`;
+}
+
+/** One envelope: its outline, and its headroom with what is spare, inside it or at the side where there is room. */
+function envelopePiece(frame: Frame, one: Envelope, spare: string, accent: string, room: Placer): Piece {
+  const left = frame.x(one.fromM);
+  const right = frame.x(one.toM);
+  const top = frame.y(one.topLevelM);
+  const foot = frame.y(one.footLevelM);
+  const cut = one.railway ? Math.min(5, (right - left) / 4, (foot - top) / 3) : 0;
+  const outline = el('path', {
+    d: pathOf([
+      [left, foot],
+      [left, top + cut],
+      [left + cut, top],
+      [right - cut, top],
+      [right, top + cut],
+      [right, foot],
+    ]),
+    fill: 'none',
+    stroke: accent,
+    'stroke-width': pens.medium,
+  });
+  const headroom = (one.topLevelM - one.footLevelM).toFixed(2);
+  const inside = `${length(one.toM - one.fromM)} × ${headroom}`;
+  room.takeLine(
+    [
+      [left, foot],
+      [left, top],
+      [right, top],
+      [right, foot],
+    ],
+    2,
+    2,
+  );
+  if (one.water && right - left > textWidth(inside, letters.drawing) + 8 && foot - top > 14) {
+    room.take({ left, right, top, bottom: foot }, 2);
+    return g(
+      {},
+      outline,
+      label((left + right) / 2, (top + foot) / 2 + 4, inside, { anchor: 'middle', fill: accent }),
+    );
+  }
+  const wide = Math.max(textWidth(headroom, letters.drawing), textWidth(spare, letters.drawing)) + 14;
+  const box = { top: (top + foot) / 2 - 8, bottom: (top + foot) / 2 + (spare === '' ? 6 : 19) };
+  const sides = [
+    { left: right + 3, right: right + 3 + wide, ...box },
+    { left: left - 3 - wide, right: left - 3, ...box },
+  ];
+  const atLeft = room.choose(sides) === 1;
+  const x = atLeft ? left - 7 : right + 7;
+  return g(
+    {},
+    outline,
+    uprightDimension(x, top, foot, headroom, { colour: accent, side: atLeft ? 'left' : 'right' }),
+    spare !== '' &&
+      label(x + (atLeft ? -6 : 6), (top + foot) / 2 + 17, spare, {
+        anchor: atLeft ? 'end' : 'start',
+        fill: spare.endsWith('low') ? accent : colours.ink,
+        halo: true,
+      }),
+  );
+}
+
 /** Outline of each envelope in the accent with its headroom; over a railway the upper corners are cut. */
 export function clearances(
+  site: Site,
+  option: AppraisedOption | null,
   frame: Frame,
   list: readonly Envelope[],
   accent: string,
-  room: Placer | null,
+  room: Placer,
 ): Piece {
   return g(
     { class: 'clearances' },
-    list.map((one) => {
-      const left = frame.x(one.fromM);
-      const right = frame.x(one.toM);
-      const top = frame.y(one.topLevelM);
-      const foot = frame.y(one.footLevelM);
-      const cut = one.railway ? Math.min(5, (right - left) / 4, (foot - top) / 3) : 0;
-      const outline = pathOf([
-        [left, foot],
-        [left, top + cut],
-        [left + cut, top],
-        [right - cut, top],
-        [right, top + cut],
-        [right, foot],
-      ]);
-      const headroom = (one.topLevelM - one.footLevelM).toFixed(2);
-      const inside = `${length(one.toM - one.fromM)} × ${headroom}`;
-      const fitsInside = one.water && right - left > textWidth(inside, 11) + 8 && foot - top > 14;
-      room?.takeLine(
-        [
-          [left, foot],
-          [left, top],
-          [right, top],
-          [right, foot],
-        ],
-        2,
-        2,
-      );
-      if (fitsInside) room?.take({ left, right, top, bottom: foot }, 2);
-      const beside = right + 7;
-      if (!fitsInside) room?.take({ left: beside - 3, right: beside + 34, top, bottom: foot }, 2);
-      return g(
-        {},
-        el('path', { d: outline, fill: 'none', stroke: accent, 'stroke-width': pens.medium }),
-        fitsInside
-          ? label((left + right) / 2, (top + foot) / 2 + 4, inside, { anchor: 'middle', fill: accent })
-          : uprightDimension(beside, top, foot, headroom, { colour: accent }),
-      );
-    }),
+    list.map((one) => envelopePiece(frame, one, spareWords(site, option, one), accent, room)),
   );
 }
 

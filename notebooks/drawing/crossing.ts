@@ -6,7 +6,7 @@ import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Envelope } from './clearances.ts';
 import { barredDimension, barredWash, clearances, envelopes } from './clearances.ts';
 import type { Room } from './crossingLetters.ts';
-import { belowGround, depthMarks, levelMarks, names, spareWords, takeRoom } from './crossingLetters.ts';
+import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
 import { dimensionChain } from './dimension.ts';
 import { chainagesShown, crossingScale, elevationBody, levelRange, optionWords } from './elevation.ts';
@@ -121,9 +121,8 @@ export function crossing(input: CrossingInput): Piece {
     (one) => one.toM > shown.fromM && one.fromM < shown.toM,
   );
   const barred = small ? null : barredPiece(site, option, list, room);
-  const marked = small ? null : clearances(frame, list, ink.accent, room.placer);
+  const marked = small ? null : clearances(site, option, frame, list, ink.accent, room.placer);
   const depths = option === null || small ? [] : depthMarks(site, option, room);
-  const spares = option === null || small ? [] : spareWords(site, option, list, room);
   const levels = small ? [] : levelMarks(site, input.obstacles, room);
   const named = names(site, room);
   const below = small ? [] : belowGround(site, option, room, range.bottomM);
@@ -175,7 +174,6 @@ export function crossing(input: CrossingInput): Piece {
         marked,
         option !== null && !small && gradients(site, option, frame),
         depths,
-        spares,
         levels,
         named,
         below,

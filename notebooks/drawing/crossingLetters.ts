@@ -10,7 +10,6 @@ import {
   spansOf,
   supportChainages,
 } from './alongOption.ts';
-import type { Envelope } from './clearances.ts';
 import { uprightDimension } from './dimension.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters } from './ink.ts';
@@ -56,7 +55,14 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
   for (const { kind, clearance } of obstacles ?? []) {
     if (clearance === null || kind === 'river') continue;
     marks.push({
-      at: [clearance.fromM - 3, clearance.fromM - 8, clearance.fromM - 13, clearance.toM + 4],
+      at: [
+        clearance.fromM - 3,
+        clearance.fromM - 8,
+        clearance.fromM - 13,
+        clearance.toM + 4,
+        clearance.toM + 11,
+        clearance.toM + 15,
+      ],
       levelM: clearance.datumLevelM,
       words: `${level(clearance.datumLevelM)} ${kind === 'railway' ? 'rail' : kind}`,
       water: false,
@@ -167,31 +173,6 @@ export function names(site: Site, room: Room): (Piece | null)[] {
       );
     });
   return [...river, ...ways];
-}
-
-/** What is left between an envelope and the soffit, in words, where it is less than a metre. */
-export function spareWords(
-  site: Site,
-  option: AppraisedOption,
-  list: readonly Envelope[],
-  room: Room,
-): (Piece | null)[] {
-  const { frame } = room;
-  return list.map((one) => {
-    const spares = [0, 0.25, 0.5, 0.75, 1].map(
-      (part) => soffitLevel(site, option, one.fromM + part * (one.toM - one.fromM)) - one.topLevelM,
-    );
-    const least = Math.min(...spares);
-    if (!Number.isFinite(least) || least >= 1) return null;
-    const words = least < -0.005 ? `${level(-least)} too low` : `${level(least)} spare`;
-    const width = textWidth(words, letters.drawing);
-    const top = frame.y(one.topLevelM) + 8;
-    const places = [0, 6, 12].flatMap((down) => [
-      [frame.x(one.fromM) - width - 6, top + down] as const,
-      [frame.x(one.toM) + 42, top + down] as const,
-    ]);
-    return freeLabel(room, places, words, { fill: least < -0.005 ? room.accent : colours.ink }, Infinity);
-  });
 }
 
 /** Founding levels with their spread beside the piles, and the bearing stratum named on its own line. */

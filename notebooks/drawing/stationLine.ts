@@ -62,21 +62,24 @@ function span(lineX: number, from: number, to: number, used: boolean): Piece {
   );
 }
 
-/** The line from one mark to the next: full, dashed while being worked out, dotted below a failure, broken at it. */
-function stretch(lineX: number, from: number, to: number, state: StationState): Piece {
+/** Height of the break line under a failed station with the line that leads to it, px. */
+const breakPx = 34;
+
+/** The line from one mark to the next: full, dashed while being worked out, dotted where figures are held; broken under a failure. */
+function stretch(lineX: number, from: number, to: number, state: StationState, afterFailure: boolean): Piece {
   const dash = state === 'pending' ? '5 4' : state === 'held' ? '1.4 3.2' : undefined;
-  const middle = (from + to) / 2;
-  const d =
-    state === 'failed'
-      ? `M${num(lineX)},${num(from)}V${num(middle - 9)}l-6,4l12,6l-6,4V${num(to)}`
-      : `M${num(lineX)},${num(from)}V${num(to)}`;
-  return el('path', {
-    d,
-    fill: 'none',
-    stroke: colours.ink,
-    'stroke-width': pens.medium,
-    'stroke-dasharray': dash,
-  });
+  const start = afterFailure ? Math.min(from + breakPx, to) : from;
+  const line = { fill: 'none', stroke: colours.ink, 'stroke-width': pens.medium } as const;
+  return g(
+    {},
+    afterFailure &&
+      el('path', {
+        d: `M${num(lineX)},${num(from)}V${num(start - 22)}l-6,4l12,6l-6,4V${num(start)}`,
+        ...line,
+      }),
+    start < to &&
+      el('path', { d: `M${num(lineX)},${num(start)}V${num(to)}`, 'stroke-dasharray': dash, ...line }),
+  );
 }
 
 /** Spans that leave the screen, drawn as one to its edge, where words say where they go. */
@@ -137,14 +140,7 @@ export function stationLine(input: StationLineInput): Piece {
   const stretches: Piece[] = [];
   for (const mark of marks) {
     const next = mark.state ?? 'done';
-    stretches.push(
-      stretch(
-        lineX,
-        from,
-        mark.y,
-        next === 'failed' ? 'done' : next === 'done' ? (state === 'failed' ? 'failed' : 'done') : next,
-      ),
-    );
+    stretches.push(stretch(lineX, from, mark.y, next === 'failed' ? 'done' : next, state === 'failed'));
     from = mark.y;
     state = next;
   }
@@ -154,6 +150,7 @@ export function stationLine(input: StationLineInput): Piece {
       from,
       input.heightPx,
       state === 'pending' ? 'pending' : state === 'done' ? 'done' : 'held',
+      state === 'failed',
     ),
   );
   return sheet(

@@ -1,0 +1,166 @@
+import { describe, expect, it } from 'vitest';
+import { byCost } from '../../notebooks/charts/rowHead.ts';
+import { ranking } from '../../notebooks/charts/ranking.ts';
+import { leastSoffit, soffitLevel, supportChainages } from '../../notebooks/drawing/alongOption.ts';
+import { crossing } from '../../notebooks/drawing/crossing.ts';
+import { elevation } from '../../notebooks/drawing/elevation.ts';
+import { pxPerMetre } from '../../notebooks/drawing/scale.ts';
+import { stack } from '../../notebooks/drawing/stack.ts';
+import { toText } from '../../notebooks/drawing/toText.ts';
+import { expectGolden, elements, wordsOf } from './golden.ts';
+import { budget, obstacles, options, site, standing } from './fixture.ts';
+import { sheets } from './sheets.ts';
+
+const second = options[1]!;
+
+describe('golden drawings', () => {
+  it.each(Object.keys(sheets))('%s is as it was last accepted', (name) => {
+    expectGolden(name, sheets[name]!());
+  });
+});
+
+describe('every drawing', () => {
+  it.each(Object.keys(sheets))('%s holds no style attribute, no script and only finite figures', (name) => {
+    for (const { tag, attrs } of elements(sheets[name]!())) {
+      expect(tag).not.toMatch(/^(style|script|foreignObject)$/);
+      expect(attrs).not.toHaveProperty('style');
+      for (const value of Object.values(attrs)) expect(value).not.toMatch(/NaN|Infinity|undefined/);
+    }
+  });
+
+  it.each(Object.keys(sheets))('%s has a name and a role, and prints no unknown figure as one', (name) => {
+    const piece = sheets[name]!();
+    expect(piece.tag).toBe('svg');
+    expect(piece.attrs['role']).toMatch(/^(img|group)$/);
+    expect(piece.attrs['aria-label']!.length).toBeGreaterThan(8);
+    expect(wordsOf(piece).join(' ')).not.toMatch(/NaN|Infinity|undefined|null/);
+  });
+
+  it.each(Object.keys(sheets))('%s refers only to patterns and windows of its own', (name) => {
+    const piece = sheets[name]!();
+    const own = new Set([...elements(piece)].flatMap(({ attrs }) => attrs['id'] ?? []));
+    const text = toText(piece);
+    for (const [, id = ''] of text.matchAll(/url\(#([^)]+)\)/g)) expect(own).toContain(id);
+  });
+});
+
+/** Numbers of every path of a drawing that has the given class somewhere above it. */
+function bubblesOf(widthPx: number): { readonly x: number; readonly words: string }[] {
+  const piece = crossing({ site, option: second, obstacles, widthPx });
+  const group = [...elements(piece)].find(({ attrs }) => attrs['class'] === 'bubbles')!;
+  const circles = [...elements(group)]
+    .filter(({ tag }) => tag === 'circle')
+    .map(({ attrs }) => Number(attrs['cx']));
+  return wordsOf(group).map((words, index) => ({ x: circles[index]!, words }));
+}
+
+describe('crossing(input)', () => {
+  it('stands its bubbles at the true distances of 1:1000', () => {
+    const bubbles = bubblesOf(980);
+    expect(bubbles.map(({ words }) => words)).toEqual(['A', 'P1', 'P2', 'B']);
+    // One metre at 1:1000 is one millimetre, and 25.4 of them are 96 px.
+    const metre = 96 / 25.4;
+    expect(bubbles[1]!.x - bubbles[0]!.x).toBeCloseTo(70 * metre, 1);
+    expect(bubbles[3]!.x - bubbles[0]!.x).toBeCloseTo(230 * metre, 1);
+  });
+
+  it('states the least spare of the band in bold and the depth at its deepest pier', () => {
+    const piece = crossing({ site, option: second, obstacles, widthPx: 980 });
+    expect(wordsOf(piece)).toContain('3.60');
+    const spares = supportChainages(second).map(
+      (at) => soffitLevel(site, second, at) - leastSoffit(site, at),
+    );
+    expect(Math.min(...spares.filter(Number.isFinite))).toBeGreaterThan(0);
+    const bold = [...elements(piece)]
+      .filter(({ tag, attrs }) => tag === 'text' && attrs['font-weight'] === '600')
+      .flatMap(({ children }) => children);
+    // Over the envelope of the railway at its far end: soffit 17.64, lowest allowed 17.10.
+    expect(bold).toContain('0.54');
+  });
+
+  it('says a depth too low in words', () => {
+    const deep = {
+      ...second,
+      profile: {
+        ...second.profile,
+        startLevelM: second.profile.startLevelM - 1,
+        endLevelM: second.profile.endLevelM - 1,
+      },
+    };
+    expect(
+      wordsOf(crossing({ site, option: deep, obstacles, widthPx: 980 })).some((words) =>
+        words.endsWith('too low'),
+      ),
+    ).toBe(true);
+  });
+
+  it('draws a site without zones, water, limits or ground classes', () => {
+    const bare = { ...site, zones: [], waters: [], soffitLimits: [], groundStretches: [], mainOpening: null };
+    const words = wordsOf(crossing({ site: bare, option: null, widthPx: 980 }));
+    expect(words).toContain('ground');
+    expect(words).not.toContain('at least');
+  });
+});
+
+describe('elevation(input)', () => {
+  it('draws lengths and heights at one scale', () => {
+    const piece = elevation({ site, option: options[4]!, widthPx: 980, scale: 1000 });
+    const pylon = [...elements(piece)].find(({ attrs }) => attrs['data-form'] === 'cable-stayed')!;
+    const shapes = [...elements(pylon)]
+      .filter(({ tag }) => tag === 'path')
+      .map(({ attrs }) =>
+        [...attrs['d']!.matchAll(/(-?[\d.]+),(-?[\d.]+)/g)].map(
+          ([, x, y]) => [Number(x), Number(y)] as const,
+        ),
+      );
+    const leg = shapes.find(
+      (points) => points.length === 4 && Math.abs(points[0]![1] - points[2]![1]) > 150,
+    )!;
+    // The leg of the fixture is 50 m high and 3.2 m wide at its foot; the road falls by 9.8 mm a metre.
+    expect(Math.abs(leg[0]![1] - leg[3]![1])).toBeCloseTo(50 * pxPerMetre(1000), 0);
+    expect(Math.abs(leg[0]![0] - leg[1]![0])).toBeCloseTo(3.2 * pxPerMetre(1000), 1);
+  });
+});
+
+describe('stack(input)', () => {
+  const piece = stack({ site, options, standing, budget, currency: 'EUR', reference: 2, widthPx: 1224 });
+  const rows = [...elements(piece)].filter(({ attrs }) => attrs['data-option'] !== undefined);
+
+  it('has one row per option that keys can reach, and presses only the reference', () => {
+    expect(rows.map(({ attrs }) => attrs['data-option'])).toEqual(['1', '2', '3', '4', '5', '6']);
+    for (const { attrs } of rows) expect(attrs['tabindex']).toBe('0');
+    expect(
+      rows.filter(({ attrs }) => attrs['aria-pressed'] === 'true').map(({ attrs }) => attrs['data-option']),
+    ).toEqual(['2']);
+  });
+
+  it('prints costs to two figures and odds in steps of five', () => {
+    const words = rows.map(wordsOf);
+    expect(words[1]).toEqual(expect.arrayContaining(['9.7', '8.0 to 12', '90 % within budget', 'reference']));
+    expect(words[4]).toEqual(expect.arrayContaining(['16', '13 to 21', '5 % within budget', 'out']));
+  });
+
+  it('leaves out budget and odds where there is none', () => {
+    const without = stack({
+      site,
+      options,
+      standing: { ...standing, within: {} },
+      budget: null,
+      currency: 'EUR',
+      reference: null,
+      widthPx: 1224,
+    });
+    expect(wordsOf(without).join(' ')).not.toMatch(/budget|reference/);
+  });
+});
+
+describe('ranking(input)', () => {
+  it('gives differences from the reference and says what cannot be separated', () => {
+    const text = toText(
+      ranking({ options: byCost(options), standing, budget, currency: 'EUR', reference: 2 }),
+    );
+    expect(text).toContain('+0.2');
+    expect(text).toContain('cannot be separated from 4 and 6');
+    expect(text).not.toContain(' style=');
+  });
+});

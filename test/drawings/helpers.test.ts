@@ -1,0 +1,193 @@
+import { describe, expect, it } from 'vitest';
+import { dominatedSide, edgeOf, undominated } from '../../notebooks/charts/edge.ts';
+import { flatStretch } from '../../notebooks/charts/depthCurve.ts';
+import { groupOdds } from '../../notebooks/charts/costIntervals.ts';
+import { logTicks } from '../../notebooks/charts/logTicks.ts';
+import { readAt } from '../../notebooks/drawing/alongOption.ts';
+import { textWidth, wrapText } from '../../notebooks/drawing/lettering.ts';
+import { el } from '../../notebooks/drawing/piece.ts';
+import { placer } from '../../notebooks/drawing/placer.ts';
+import { largestScale, pxPerMetre } from '../../notebooks/drawing/scale.ts';
+import { toSvgFile, toText } from '../../notebooks/drawing/toText.ts';
+import {
+  chainage,
+  fixed,
+  listed,
+  money2,
+  moneyUnit,
+  odds,
+  signed,
+  significant,
+  spansText,
+} from '../../notebooks/format.ts';
+import { formLooks } from '../../notebooks/forms/formLook.ts';
+import { tint } from '../../notebooks/forms/formInk.ts';
+import { contrast } from '../../notebooks/forms/optionNumber.ts';
+import { formIds } from '../../lib/model/index.ts';
+
+describe('figures as printed', () => {
+  it('fixed(value, places) puts thin spaces into thousands and a true minus in front', () => {
+    expect(fixed(1240, 0)).toBe('1\u2009240');
+    expect(fixed(-1234567.891, 2)).toBe('\u22121\u2009234\u2009567.89');
+    expect(fixed(-0.001, 2)).toBe('0.00');
+    expect(fixed(NaN, 2)).toBe('\u2013');
+    expect(fixed(Infinity, 0)).toBe('\u2013');
+  });
+  it('money2(value) keeps two figures and no more', () => {
+    expect([9.66, 12.4, 0.881, 99.6, 3412, 9.96, 0].map(money2)).toEqual([
+      '9.7',
+      '12',
+      '0.88',
+      '100',
+      '3\u2009400',
+      '10',
+      '0',
+    ]);
+  });
+  it('significant(value, 3) rounds a value that gains a digit', () => {
+    expect(significant(9.996, 3)).toBe('10.0');
+    expect(significant(-0.04567, 2)).toBe('\u22120.046');
+  });
+  it('odds(share) goes in steps of five and never says 0 or 100', () => {
+    expect([0, 0.02, 0.03, 0.5, 0.62, 0.63, 0.97, 0.98, 1].map(odds)).toEqual([
+      '<5',
+      '<5',
+      '5',
+      '50',
+      '60',
+      '65',
+      '95',
+      '>95',
+      '>95',
+    ]);
+  });
+  it('signed, chainage, spansText and listed read as they are said', () => {
+    expect([signed(0.2, 1), signed(-1.3, 1), signed(0.01, 1)]).toEqual(['+0.2', '\u22121.3', '0.0']);
+    expect([chainage(1240), chainage(1323.5)]).toEqual(['1\u2009240', '1\u2009323.5']);
+    expect(spansText([70, 90.5, 70])).toBe('70 + 90.5 + 70');
+    expect(listed(['1', '2', '3'])).toBe('1, 2 and 3');
+  });
+  it('moneyUnit(currency, largest) turns to thousands below a million', () => {
+    expect(moneyUnit('EUR', 11.5e6)).toEqual({ per: 1e6, label: 'M€' });
+    expect(moneyUnit('CHF', 4e5)).toEqual({ per: 1e3, label: 'kCHF' });
+  });
+});
+
+describe('scale', () => {
+  it('pxPerMetre(scale) draws 1:1000 at a millimetre a metre', () => {
+    // CSS defines 96 px as one inch, 25.4 mm (CSS Values and Units 3, section 6.2, from memory).
+    expect(pxPerMetre(1000)).toBeCloseTo(96 / 25.4, 10);
+    expect(259 * pxPerMetre(1000)).toBeLessThan(980);
+  });
+  it('largestScale(length, width) takes the largest of the series that fits', () => {
+    expect(largestScale(12.5, 640)).toBe(100);
+    expect(largestScale(230, 980, 500)).toBe(1000);
+    expect(largestScale(260, 980, 500)).toBe(2000);
+    expect(largestScale(9000, 980)).toBe(5000);
+  });
+});
+
+describe('forms', () => {
+  it.each(formIds)('%s stands out from the sheet by 3 to 1', (form) => {
+    // WCAG 2.2, success criterion 1.4.11: graphical objects need 3 : 1.
+    expect(contrast(formLooks[form].colour, '#FFFFFF')).toBeGreaterThanOrEqual(3);
+  });
+  it('contrast(a, b) agrees with black on white, 21 to 1 (WCAG 2.2, definition of contrast ratio)', () => {
+    expect(contrast('#000000', '#FFFFFF')).toBeCloseTo(21, 6);
+    expect(contrast('#777777', '#FFFFFF')).toBeCloseTo(4.48, 2);
+  });
+  it('no two forms share colour or hatch', () => {
+    expect(new Set(formIds.map((form) => formLooks[form].colour)).size).toBe(formIds.length);
+    expect(new Set(formIds.map((form) => JSON.stringify(formLooks[form].hatch))).size).toBe(formIds.length);
+  });
+  it('tint(colour, part) mixes into white', () => {
+    expect([tint('#000000', 0), tint('#000000', 1), tint('#FF0000', 0.5)]).toEqual([
+      '#FFFFFF',
+      '#000000',
+      '#FF8080',
+    ]);
+  });
+});
+
+describe('lettering', () => {
+  it('textWidth(text, size) grows with size and weight, and figures are of one width', () => {
+    expect(textWidth('111', 10)).toBe(textWidth('888', 10));
+    expect(textWidth('bridge', 20)).toBeCloseTo(2 * textWidth('bridge', 10), 10);
+    expect(textWidth('bridge', 10, 600)).toBeGreaterThan(textWidth('bridge', 10));
+  });
+  it('wrapText(text, width, size) breaks between words only', () => {
+    expect(wrapText('one two three', 1, 10)).toEqual(['one', 'two', 'three']);
+    expect(wrapText('one two three', 1000, 10)).toEqual(['one two three']);
+  });
+  it('placer chooses the free place and remembers it', () => {
+    const room = placer({ left: 0, top: 0, right: 100, bottom: 100 });
+    const here = { left: 0, right: 10, top: 0, bottom: 10 };
+    const there = { left: 20, right: 30, top: 0, bottom: 10 };
+    expect(room.choose([here, there])).toBe(0);
+    expect(room.choose([here, there])).toBe(1);
+    expect(room.choose([here], 1)).toBe(-1);
+  });
+});
+
+describe('markup', () => {
+  it('toText(piece) escapes what people type', () => {
+    expect(toText(el('text', { 'aria-label': 'a "b" <c>' }, '5 < 6 & 7'))).toBe(
+      '<text aria-label="a &quot;b&quot; &lt;c&gt;">5 &lt; 6 &amp; 7</text>\n',
+    );
+  });
+  it('el(tag, attrs) leaves out what is not set and rounds to the hundredth', () => {
+    expect(
+      el('rect', { x: 1.23456, y: -0.001, fill: null, class: undefined, hidden: false, open: true }).attrs,
+    ).toEqual({ x: '1.23', y: '0', open: '' });
+  });
+  it('toSvgFile(piece) states true size in millimetres', () => {
+    expect(toSvgFile(el('svg', { width: 960, height: 96 }))).toContain('width="254mm" height="25.4mm"');
+  });
+});
+
+describe('figures behind charts', () => {
+  it('readAt(xs, ys, x) reads straight between and holds outside', () => {
+    expect([-1, 0, 0.5, 1, 3].map((x) => readAt([0, 1], [10, 20], x))).toEqual([10, 10, 15, 20, 20]);
+    expect(readAt([], [], 1)).toBeNaN();
+  });
+  it('undominated(points) keeps what nothing beats, ties included', () => {
+    const points = [
+      { number: 1, x: 1, y: 3 },
+      { number: 2, x: 2, y: 2 },
+      { number: 3, x: 2, y: 3 },
+      { number: 4, x: 2, y: 2 },
+    ];
+    expect([...undominated(points)]).toEqual([1, 2, 4]);
+    expect(edgeOf(points)[0]).toEqual([1, Infinity]);
+    expect(edgeOf(points).at(-1)).toEqual([Infinity, 2]);
+    expect(dominatedSide([])).toEqual([]);
+  });
+  it('flatStretch(points) finds the depths within one per cent of a parabola', () => {
+    // cost = 100 (1 + (d - 2)^2) is within 1 % of 100 from 1.9 to 2.1.
+    const points = Array.from({ length: 201 }, (_, i) => ({
+      depthM: 1 + i * 0.01,
+      cost: 100 * (1 + (i * 0.01 - 1) ** 2),
+    }));
+    const [low, high] = flatStretch(points)!;
+    expect(low).toBeCloseTo(1.9, 3);
+    expect(high).toBeCloseTo(2.1, 3);
+    expect(flatStretch([])).toBeNull();
+  });
+  it('groupOdds(group, standing) names the cheaper of two and the range of more', () => {
+    const standing = {
+      leader: 1,
+      groups: [],
+      within: {},
+      because: [],
+      odds: { 1: { 2: 0.62, 3: 0.7 }, 2: { 1: 0.38, 3: 0.55 }, 3: { 1: 0.3, 2: 0.45 } },
+    };
+    expect(groupOdds([1, 2], standing)).toBe('60 % that 1 is cheaper');
+    expect(groupOdds([1, 2, 3], standing)).toBe('55 to 70 %, either way round');
+  });
+  it('logTicks(low, high, place) keeps its distance and its round values', () => {
+    const ticks = logTicks(8, 22, (value) => 300 * Math.log10(value));
+    expect(ticks).toContain(10);
+    for (let i = 1; i < ticks.length; i += 1)
+      expect(300 * Math.log10(ticks[i]! / ticks[i - 1]!)).toBeGreaterThanOrEqual(15);
+  });
+});

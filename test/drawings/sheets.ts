@@ -1,0 +1,141 @@
+import { checkBars } from '../../notebooks/charts/checkBars.ts';
+import { costByPart } from '../../notebooks/charts/costByPart.ts';
+import { costIntervals } from '../../notebooks/charts/costIntervals.ts';
+import { depthCurve } from '../../notebooks/charts/depthCurve.ts';
+import { oddsMatrix } from '../../notebooks/charts/oddsMatrix.ts';
+import { quantityMarks } from '../../notebooks/charts/quantityMarks.ts';
+import { rangePanels } from '../../notebooks/charts/rangePanels.ts';
+import { byCost } from '../../notebooks/charts/rowHead.ts';
+import { spanChart } from '../../notebooks/charts/spanChart.ts';
+import { tradeOffs } from '../../notebooks/charts/tradeOffs.ts';
+import { crossing } from '../../notebooks/drawing/crossing.ts';
+import { elevation } from '../../notebooks/drawing/elevation.ts';
+import { colours, pens } from '../../notebooks/drawing/ink.ts';
+import { keyLine } from '../../notebooks/drawing/keyLine.ts';
+import { label } from '../../notebooks/drawing/label.ts';
+import { ladder } from '../../notebooks/drawing/ladder.ts';
+import type { Piece } from '../../notebooks/drawing/piece.ts';
+import { el, g } from '../../notebooks/drawing/piece.ts';
+import { section } from '../../notebooks/drawing/section.ts';
+import { sectionRow } from '../../notebooks/drawing/sectionRow.ts';
+import { sheet } from '../../notebooks/drawing/sheet.ts';
+import { stack } from '../../notebooks/drawing/stack.ts';
+import { stationLine } from '../../notebooks/drawing/stationLine.ts';
+import { formLooks } from '../../notebooks/forms/formLook.ts';
+import { glyph } from '../../notebooks/forms/glyph.ts';
+import { hatchId, hatches } from '../../notebooks/forms/hatch.ts';
+import { optionNumber } from '../../notebooks/forms/optionNumber.ts';
+import { formIds } from '../../lib/model/index.ts';
+import { checks, depthPoints, measures, published, spanRows } from './figures.ts';
+import { budget, obstacles, options, site, standing } from './fixture.ts';
+
+const second = options[1]!;
+const third = options[2]!;
+const sorted = byCost(options);
+const shared = { options: sorted, reference: 2, widthPx: 980 } as const;
+const currency = 'EUR';
+
+/** All seventeen forms: glyph, colour, hatch. */
+function forms(): Piece {
+  return sheet(560, formIds.length * 30 + 12, 'Forms with glyph, colour and hatch', [
+    el('defs', {}, hatches(formIds, 'forms')),
+    formIds.map((form, index) => {
+      const y = 22 + index * 30;
+      const { colour, name } = formLooks[form];
+      return g(
+        {},
+        glyph(form, 8, y - 8, colour),
+        glyph(form, 56, y - 12.8, colour, 1.6),
+        label(122, y + 4, name),
+        optionNumber(index + 1, 300, y, { colour }),
+        optionNumber(index + 1, 328, y, { colour, filled: true }),
+        el('path', { d: `M350,${String(y)}h40`, stroke: colour, 'stroke-width': pens.thick }),
+        el('rect', {
+          x: 400,
+          y: y - 9,
+          width: 150,
+          height: 18,
+          fill: `url(#${hatchId('forms', form)})`,
+          stroke: colours.ink,
+          'stroke-width': pens.fine,
+        }),
+      );
+    }),
+  ]);
+}
+
+const joined = { at: '3+010', uses: ['1+010', '2+010'], usedBy: ['4+010', '5+010'] } as const;
+
+/** Every drawing and chart once, by the name of its golden file. */
+export const sheets: Readonly<Record<string, () => Piece>> = {
+  forms,
+  crossing: () => crossing({ site, option: second, obstacles, widthPx: 980 }),
+  'crossing-bare': () => crossing({ site, option: null, obstacles, widthPx: 980 }),
+  'crossing-small': () => crossing({ site, option: second, obstacles, widthPx: 358 }),
+  'crossing-window': () =>
+    crossing({
+      site,
+      option: second,
+      obstacles,
+      widthPx: 980,
+      scale: 500,
+      window: { fromM: 1300, toM: 1420 },
+    }),
+  ...Object.fromEntries(
+    options.map((option) => [`elevation-${option.form}`, () => elevation({ site, option, widthPx: 980 })]),
+  ),
+  stack: () => stack({ site, options, standing, budget, currency, reference: 2, widthPx: 1224 }),
+  'stack-black': () =>
+    stack({ site, options, standing, budget, currency, reference: 2, widthPx: 1224, paper: 'black' }),
+  'stack-narrow': () => stack({ site, options, standing, budget, currency, reference: 2, widthPx: 358 }),
+  'section-halves': () => section({ design: second.designs[0]!, widthPx: 700 }),
+  'section-concrete': () => section({ design: third.designs[0]!, widthPx: 700, paper: 'black' }),
+  sections: () => sectionRow({ options: sorted, reference: 2, widthPx: 1224 }),
+  ladder: () => ladder({ site, option: second, obstacle: obstacles[0]! }),
+  'span-chart': () =>
+    spanChart({ rows: spanRows, askedM: 63, askedWords: '63 m asked: 60 clear, plus a pier', widthPx: 980 }),
+  'span-chart-narrow': () => spanChart({ rows: spanRows, askedM: 63, widthPx: 358 }),
+  'depth-curve': () =>
+    depthCurve({
+      form: 'composite-i',
+      points: depthPoints,
+      depthM: 2.3,
+      limits: [{ depthM: 1.75, words: 'flange at the pier is full' }],
+      currency,
+      widthPx: 560,
+    }),
+  checks: () => checkBars({ form: 'composite-i', checks, widthPx: 300 }),
+  quantities: () => quantityMarks({ ...shared, published }),
+  'cost-by-part': () => costByPart({ ...shared, currency, widthPx: 1224 }),
+  'cost-intervals': () => costIntervals({ ...shared, standing, budget, currency, priceDate: '2026 Q1' }),
+  'cost-intervals-black': () => costIntervals({ ...shared, standing, budget, currency, paper: 'black' }),
+  odds: () => oddsMatrix({ ...shared, standing, unseparated: [0.2, 0.8] }),
+  ranges: () => rangePanels({ ...shared, measures }),
+  'trade-offs': () => tradeOffs({ ...shared, measures, budget, currency, widthPx: 1224 }),
+  'key-line': () =>
+    keyLine({
+      sections: ['Brief', 'What can span it', 'Arrangements', 'Section', 'Cost'].map((name, index) => ({
+        number: index + 1,
+        name,
+        href: `#s${String(index + 1)}`,
+        stations: [`${String(index + 1)}+010`],
+      })),
+      widthPx: 1224,
+      joined,
+    }),
+  'station-line': () =>
+    stationLine({
+      heightPx: 620,
+      view: { top: 0, bottom: 520 },
+      joined,
+      marks: [
+        { name: 's1', y: 20, post: true },
+        { name: '1+010', y: 60 },
+        { name: '2+010', y: 130 },
+        { name: '3+010', y: 220 },
+        { name: '4+010', y: 330, state: 'pending' },
+        { name: '4+020', y: 420, state: 'failed' },
+        { name: '5+010', y: 560, state: 'held' },
+      ],
+    }),
+};
