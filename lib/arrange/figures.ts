@@ -8,7 +8,11 @@ const keptIndex = (at: At): number =>
   at.study.options.kept.findIndex((kept) => kept.number === at.option.number);
 
 /** What decides a chainage that the search was free to choose. */
-function searched(at: At): { readonly ends: string[]; readonly opening: string[]; readonly windows: string[] } {
+function searched(at: At): {
+  readonly ends: string[];
+  readonly opening: string[];
+  readonly windows: string[];
+} {
   const { form } = at.option.units[at.index('unit')]!;
   const both = (what: string): string[] => [`windows/${form}/${what}/least`, `windows/${form}/${what}/most`];
   return {

@@ -115,7 +115,7 @@ export function pylonLayouts(search: MainSearch, pattern: Extract<Pattern, { kin
       const whole = Math.ceil(mainM - SLACK);
       let row = rows.get(whole);
       if (row === undefined) {
-        row = spanCosts(table, request.form, whole);
+        row = spanCosts(table, { form: request.form, role: 'main' }, whole);
         rows.set(whole, row);
       }
       const deck = spanCostAt(row, mainM);

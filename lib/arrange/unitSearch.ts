@@ -266,7 +266,7 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): void
       task,
       G,
       K,
-      cost: spanCosts(table, task.form, G),
+      cost: spanCosts(table, { form: task.form, role: task.endIsPier ? 'approach' : 'main' }, G),
       half: halfCosts(task.supports, Math.max(task.limits.minSpacingM, task.limits.interiorLeast * G), G),
       back: new Int32Array(K * n),
       closed: new Float64Array((K + 1) * ends).fill(Infinity),
