@@ -1,4 +1,9 @@
-import { columnReduction } from '../../mechanics/index.ts';
+import {
+  columnReduction,
+  effectiveWidthRatio,
+  outstandWidthRatio,
+  plateSlenderness,
+} from '../../mechanics/index.ts';
 import type { StandardId } from '../../model/index.ts';
 import { trussData } from './trussData.ts';
 
@@ -40,19 +45,24 @@ export interface MemberRules {
 
 const modulusMPa = 210000;
 
-/** Depths of one kind and width with their radii of gyration; these do not depend on the thickness of thin plates. */
+/**
+ * One depth of a kind and width under a standard, with what does not depend on the force. Radii of gyration do not depend
+ * on the thickness of thin plates.
+ */
 interface Profile {
   readonly kind: 'box' | 'H';
   readonly widthM: number;
   readonly depthM: number;
   readonly inPlaneM: number;
   readonly outOfPlaneM: number;
+  /** Share that works in compression by plate thickness, mm; NaN until asked for. */
+  readonly effective: Float64Array;
 }
 
 const families = new Map<string, readonly Profile[]>();
 
-function familyOf(kind: 'box' | 'H', widthM: number): readonly Profile[] {
-  const key = `${kind} ${widthM}`;
+function familyOf(kind: 'box' | 'H', widthM: number, standard: StandardId): readonly Profile[] {
+  const key = `${standard} ${kind} ${widthM}`;
   const known = families.get(key);
   if (known) return known;
   const made = trussData.memberDepthsM.values
@@ -63,6 +73,7 @@ function familyOf(kind: 'box' | 'H', widthM: number): readonly Profile[] {
       depthM,
       inPlaneM: radius(kind, depthM, widthM, 'in-plane'),
       outOfPlaneM: radius(kind, depthM, widthM, 'out-of-plane'),
+      effective: new Float64Array(trussData.plateMm.most + 1).fill(Number.NaN),
     }));
   families.set(key, made);
   return made;
@@ -73,7 +84,7 @@ function familyOf(kind: 'box' | 'H', widthM: number): readonly Profile[] {
  *
  * Depths are tried from the shallowest; for each the plate thickness follows from the axial force, the column curve
  * (EN 1993-1-1 6.3.1, curve b for a welded box, c for an H bent in the weak direction; AASHTO LRFD 6.9.4 for hl93),
- * net section, fatigue range and plate slenderness. Where even the deepest section needs plates beyond the thickest,
+ * effective widths of slender plates, net section and fatigue range. Where even the deepest section needs plates beyond the thickest,
  * that section comes back with a utilisation above 1.
  * @param mostDepthM greatest depth in the plane of the truss, m (bottom chords stay within the floor)
  */
@@ -84,7 +95,7 @@ export function memberSection(
   rules: MemberRules,
   mostDepthM = Infinity,
 ): MemberSection {
-  const family = familyOf(kind, widthM);
+  const family = familyOf(kind, widthM, rules.standard);
   const compressed = demand.compressionKN > 0;
   const mostSlender = compressed
     ? trussData.memberSlenderness.compression
@@ -141,25 +152,50 @@ function isLighter(a: Trial, b: Trial): boolean {
   return fits ? a.areaM2 < b.areaM2 : a.use.utilisation < b.use.utilisation;
 }
 
-/** Thinnest plate by handling and, in compression, by local buckling, mm. */
+/** Thinnest plate by handling and, in compression, by the most slender plate used, mm. */
 function leastPlateMm(profile: Profile, compressed: boolean): number {
-  const { plateMm, boxPlateSlenderness, outstandSlenderness } = trussData;
+  const { plateMm, mostPlateSlenderness } = trussData;
   if (!compressed) return plateMm.least;
-  const localMm =
-    profile.kind === 'box'
-      ? (1000 * Math.max(profile.widthM, profile.depthM)) / boxPlateSlenderness.value
-      : (500 * profile.depthM) / outstandSlenderness.value;
-  return roundUp(Math.max(plateMm.least, localMm));
+  const { kind, widthM: w, depthM: d } = profile;
+  const slenderMm =
+    kind === 'box'
+      ? (1000 * Math.max(w, d)) / mostPlateSlenderness.box
+      : Math.max((500 * d) / mostPlateSlenderness.outstand, (1000 * w) / mostPlateSlenderness.box / webShare);
+  return roundUp(Math.max(plateMm.least, slenderMm));
 }
 
-/** Thickness for the demand; the strength falls with thickness, so the first answer is corrected a few times. */
+/** Share of the area that works in compression: effective widths of its plates at yield (EN 1993-1-5 4.4). */
+function effectiveShare(profile: Profile, thicknessMm: number, fyMPa: number): number {
+  const { kind, widthM: w, depthM: d } = profile;
+  const t = thicknessMm / 1000;
+  if (kind === 'box') return (w * inner(w / t, fyMPa) + d * inner(d / t, fyMPa)) / (w + d);
+  const flange = outstandWidthRatio(plateSlenderness(d / 2 / t, fyMPa, 0.43));
+  return (2 * d * flange + webShare * w * inner(w / (webShare * t), fyMPa)) / (2 * d + webShare * w);
+}
+
+/** Effective share of a plate held on both edges. */
+function inner(widthOverThickness: number, fyMPa: number): number {
+  return effectiveWidthRatio(plateSlenderness(widthOverThickness, fyMPa, 4));
+}
+
+/** Thinnest plate in practical steps that carries the demand: up in proportion of the use, then back by halving. */
 function trialOf(profile: Profile, leastMm: number, demand: MemberDemand, rules: MemberRules): Trial {
-  const { most } = trussData.plateMm;
+  const { most, stepMm } = trussData.plateMm;
+  let tooThin = 0;
   let thicknessMm = Math.min(leastMm, most);
   let use = useAt(profile, thicknessMm, demand, rules);
-  for (let pass = 0; pass < 5 && use.utilisation > 1 && thicknessMm < most; pass++) {
-    thicknessMm = Math.min(most, roundUp(thicknessMm * use.utilisation));
+  while (use.utilisation > 1 && thicknessMm < most) {
+    tooThin = thicknessMm;
+    thicknessMm = Math.min(most, Math.max(thicknessMm + stepMm, roundUp(thicknessMm * use.utilisation)));
     use = useAt(profile, thicknessMm, demand, rules);
+  }
+  while (use.utilisation <= 1 && tooThin > 0 && thicknessMm - tooThin > stepMm) {
+    const middle = roundUp((thicknessMm + tooThin) / 2 - stepMm / 2);
+    const tried = useAt(profile, middle, demand, rules);
+    if (tried.utilisation <= 1) {
+      thicknessMm = middle;
+      use = tried;
+    } else tooThin = middle;
   }
   return { profile, thicknessMm, areaM2: areaOf(profile, thicknessMm), use };
 }
@@ -183,12 +219,16 @@ function useAt(profile: Profile, thicknessMm: number, demand: MemberDemand, rule
     governs = 'fatigue';
   }
   if (demand.compressionKN > 0) {
-    const bar = (slendernessOf(profile, demand.lengthM) / Math.PI) * Math.sqrt(fy / modulusMPa);
+    let effective = profile.effective[thicknessMm]!;
+    if (Number.isNaN(effective))
+      effective = profile.effective[thicknessMm] = effectiveShare(profile, thicknessMm, fy);
+    const bar = (slendernessOf(profile, demand.lengthM) / Math.PI) * Math.sqrt((effective * fy) / modulusMPa);
     const chi =
       rules.standard === 'lm1' ? columnReduction(bar, profile.kind === 'box' ? 'b' : 'c') : aashtoColumn(bar);
     const bending = (demand.momentKNm * profile.widthM) / 2 / (areaM2 * profile.outOfPlaneM ** 2);
     const buckling =
-      demand.compressionKN / (chi * r.bucklingFactor * yieldKN) + bending / (r.bucklingFactor * fy * 1000);
+      demand.compressionKN / (chi * effective * r.bucklingFactor * yieldKN) +
+      bending / (r.bucklingFactor * fy * 1000);
     if (buckling > utilisation) {
       utilisation = buckling;
       governs = 'buckling';

@@ -20,8 +20,9 @@ const density = 7850;
 const windFactor = 1.5;
 
 /**
- * Wind truss in the plane of each chord: X-braced in every floor panel below (cross-girders are the struts) and every
- * top panel above with struts at the top nodes; portal frames in the plane of the end posts carry the upper wind down.
+ * Wind truss in the plane of each chord. Above: an X in every top panel with struts at the top nodes, and portal frames in
+ * the plane of the end posts that carry the upper wind down. Below: the slab is the web of the finished wind girder, so
+ * one diagonal in every floor panel holds the wind of erection (trusses and floor beams, no vehicles).
  * Sizes by force and by the slenderness limit of bracing.
  * @param facePerM face of one plane seen from the side, m2 per m of span
  */
@@ -38,8 +39,8 @@ export function sizeBracing(geometry: TrussGeometry, c: TrussCase, facePerM: num
   const topPanelM = geometry.hangers ? 2 * panelM : panelM;
   const topSpanM = spanM - topPanelM;
 
-  const bottom = laterals(b, panelM, spanM, windFactor * windBottomKNm, c);
-  const top = laterals(b, topPanelM, topSpanM, windFactor * windTopKNm, c);
+  const bottom = laterals(b, panelM, spanM, windFactor * (windBottomKNm - onVehicles), 1, c);
+  const top = laterals(b, topPanelM, topSpanM, windFactor * windTopKNm, 2, c);
   const struts = Math.round(topSpanM / topPanelM) - 1;
   const strutAreaM2 = areaFor((windFactor * windTopKNm * topSpanM) / 2, b, c);
   const endPostM = Math.hypot(geometry.hangers ? panelM : panelM / 2, heightM);
@@ -66,12 +67,13 @@ export function sizeBracing(geometry: TrussGeometry, c: TrussCase, facePerM: num
   };
 }
 
-/** X of two diagonals in each panel, each taking half the panel shear, held where they cross. */
+/** One or two diagonals in each panel, sharing the panel shear, held half-way by each other or by the stringers. */
 function laterals(
   widthM: number,
   panelM: number,
   lengthM: number,
   windKNm: number,
+  diagonals: 1 | 2,
   c: TrussCase,
 ): { volumeM3: number; paintM2: number } {
   const panels = Math.max(1, Math.round(lengthM / panelM));
@@ -80,9 +82,9 @@ function laterals(
   let paintM2 = 0;
   for (let k = 0; k < panels; k++) {
     const shear = Math.abs(windKNm * (lengthM / 2 - k * panelM));
-    const areaM2 = areaFor((shear / 2) * (diagonalM / widthM), diagonalM / 2, c);
-    volumeM3 += 2 * areaM2 * diagonalM;
-    paintM2 += 2 * diagonalM * 4 * sideM(areaM2);
+    const areaM2 = areaFor((shear / diagonals) * (diagonalM / widthM), diagonalM / 2, c);
+    volumeM3 += diagonals * areaM2 * diagonalM;
+    paintM2 += diagonals * diagonalM * 4 * sideM(areaM2);
   }
   return { volumeM3, paintM2 };
 }

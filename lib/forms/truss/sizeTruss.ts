@@ -28,7 +28,7 @@ const density = 7850;
 
 /**
  * Sizes all members of one truss plane for the forces of its panels; own weight and wind are found by repeating until
- * the own weight moves by less than 0.5 %; `startKNm` is the first guess of it. Chord sections run over two panels, as pieces are made.
+ * the own weight moves by less than 0.5 %; `startKNm` is the first guess of it. Chord sections run over whole pieces.
  */
 export function sizeTruss(
   geometry: TrussGeometry,
@@ -48,8 +48,8 @@ export function sizeTruss(
       demand: demands[i]!,
       section: sectionFor(member, demands[i]!, c),
     }));
-    alikeInPairs(sized, 'bottom-chord');
-    alikeInPairs(sized, 'top-chord');
+    alikeInPieces(sized, 'bottom-chord');
+    alikeInPieces(sized, 'top-chord');
     planeKg = 0;
     let faceM2 = 0;
     for (const { member, section } of sized) {
@@ -128,21 +128,26 @@ function sectionFor(member: TrussMember, demand: MemberDemand, c: TrussCase): Me
   return memberSection(tie ? 'H' : 'box', c.memberWidthM, demand, c.rules, mostDepthM);
 }
 
-/** Neighbouring chord members in one piece take the heavier section of the two. */
-function alikeInPairs(sized: SizedMember[], role: TrussMember['role']): void {
+/** Neighbouring chord members made in one piece take the heaviest section among them. */
+function alikeInPieces(sized: SizedMember[], role: TrussMember['role']): void {
   const at = sized.flatMap((one, i) => (one.member.role === role ? [i] : []));
-  for (let k = 0; k + 1 < at.length; k += 2) {
-    const a = at[k]!;
-    const b = at[k + 1]!;
-    const heavier = sized[a]!.section.areaM2 >= sized[b]!.section.areaM2 ? a : b;
-    const other = heavier === a ? b : a;
-    const { section } = sized[heavier]!;
-    const use = (demand: MemberDemand): number =>
-      section.utilisation * (force(demand) / Math.max(1e-9, force(sized[heavier]!.demand)));
-    sized[other] = {
-      ...sized[other]!,
-      section: { ...section, utilisation: Math.min(section.utilisation, use(sized[other]!.demand)) },
-    };
+  if (at.length === 0) return;
+  const perPiece = Math.max(
+    1,
+    Math.floor(trussData.pieceLengthM.value / sized[at[0]!]!.member.lengthM + 1e-9),
+  );
+  for (let start = 0; start < at.length; start += perPiece) {
+    const piece = at.slice(start, start + perPiece);
+    const heaviest = piece.reduce((a, b) => (sized[b]!.section.areaM2 > sized[a]!.section.areaM2 ? b : a));
+    const { section, demand } = sized[heaviest]!;
+    for (const i of piece) {
+      const one = sized[i]!;
+      const utilisation = Math.min(
+        section.utilisation,
+        section.utilisation * (force(one.demand) / Math.max(1e-9, force(demand))),
+      );
+      sized[i] = { ...one, section: { ...section, utilisation } };
+    }
   }
 }
 

@@ -11,12 +11,12 @@ import {
 import type { UnitTask } from '../../model/index.ts';
 import { fatigueLimitMPa } from '../floor/fatigue.ts';
 import { sizeFloor, type Floor } from '../floor/sizeFloor.ts';
+import { lightestTruss, type Layout } from './lightestTruss.ts';
 import { panelForces } from './panelForces.ts';
-import { sizeTruss, type SizedTruss } from './sizeTruss.ts';
+import type { SizedTruss } from './sizeTruss.ts';
 import type { TrussCase } from './trussCase.ts';
 import { trussData } from './trussData.ts';
 import { trussDeflection } from './trussDeflection.ts';
-import { trussGeometry } from './trussGeometry.ts';
 
 /** One simple span: two trusses, their bracing and the floor between them. */
 export interface TrussSpan {
@@ -41,18 +41,18 @@ export function trussSpan(spanM: number, task: UnitTask): TrussSpan {
   const standard = loadStandard(task.standard);
   const { deck } = task;
   const { memberWidth, planeGapM } = trussData;
-  const memberWidthM = Math.min(
+  const widestM = Math.min(
     memberWidth.mostM,
     Math.max(memberWidth.leastM, Math.round(memberWidth.ofSpan * spanM * 20) / 20),
   );
-  const planesM = deck.widthM + 2 * planeGapM.value + memberWidthM;
+  const planesM = deck.widthM + 2 * planeGapM.value + widestM;
   const planes = [-planesM / 2, planesM / 2];
   const loads = [0, 1].map((k) => trafficOnGirder(task.standard, deck, planes, k));
   const heavier = spanLoad(loads[0]!, spanM) >= spanLoad(loads[1]!, spanM) ? 0 : 1;
   const traffic = loads[heavier]!;
   const fatigueShare = worstLaneShare(task.standard, deck, rigidCrossbeam(planes, heavier));
 
-  let best: Candidate | null = null;
+  const layouts: Layout[] = [];
   for (const panels of panelCounts(spanM)) {
     const floor = sizeFloor({
       standard: task.standard,
@@ -62,72 +62,26 @@ export function trussSpan(spanM: number, task: UnitTask): TrussSpan {
       depthM: task.depthM,
       stringers: true,
     });
-    const c = trussCase(task, standard, floor, planesM, memberWidthM);
+    const c = trussCase(task, standard, floor, planesM, widestM);
     for (const hangers of [false, true]) {
       const heights = heightsFor(spanM, panels, hangers);
       if (heights.length === 0) continue;
       const forces = panelForces(spanM, panels, hangers, traffic, fatigueShare);
-      let ownKNm: number | undefined;
-      // Steel against height has one valley, with ripples from plate steps: walk down it from a lower middle height, two steps ahead.
-      const tried = new Map<number, Candidate>();
-      const at = (k: number): Candidate | null => {
-        const heightM = heights[k];
-        if (heightM === undefined) return null;
-        const known = tried.get(k);
-        if (known) return known;
-        const truss = sizeTruss(trussGeometry(spanM, heightM, panels, hangers), forces, c, ownKNm);
-        ownKNm = truss.ownKNm;
-        const candidate = { truss, floor, steelKg: steelOf(truss, floor, planesM) };
-        tried.set(k, candidate);
-        return candidate;
-      };
-      let k = Math.floor((heights.length - 1) / 3);
-      for (;;) {
-        const next = [k - 1, k + 1, k - 2, k + 2].find((other) => {
-          const candidate = at(other);
-          return candidate !== null && isBetter(candidate, at(k)!);
-        });
-        if (next === undefined) break;
-        k = next;
-      }
-      const valley = at(k)!;
-      if (best === null || isBetter(valley, best)) best = valley;
+      layouts.push({ panels, hangers, heights, forces, floor, case: c });
     }
   }
-  if (best === null) throw new RangeError(`truss: expected a span of 10 m or more, received ${spanM} m`);
+  const { truss, layout, steelKg, memberWidthM } = lightestTruss(layouts);
   return {
-    ...best,
+    truss,
+    floor: layout.floor,
+    steelKg,
     spanM,
     planesM,
     memberWidthM,
     traffic,
-    deflectionM: trussDeflection(best.truss, standard, traffic),
+    deflectionM: trussDeflection(truss, standard, traffic),
     deflectionLimitM: spanM / standard.deflection.limitRatio,
   };
-}
-
-/** Steel of a span: one more cross-girder than panels. */
-function steelOf(truss: SizedTruss, floor: Floor, planesM: number): number {
-  const { spanM } = truss.geometry;
-  return (
-    2 * truss.planeKg +
-    truss.bracing.massKg +
-    floor.steelKgPerM * spanM +
-    floor.crossGirder.massKgPerM * planesM
-  );
-}
-
-/** One layout: panels, height and whether there are hangers. */
-interface Candidate {
-  readonly truss: SizedTruss;
-  readonly floor: Floor;
-  readonly steelKg: number;
-}
-
-function isBetter(a: Candidate, b: Candidate): boolean {
-  const use = Math.max(1, a.truss.worst.section.utilisation);
-  const bestUse = Math.max(1, b.truss.worst.section.utilisation);
-  return use < bestUse - 1e-9 || (use <= bestUse + 1e-9 && a.steelKg < b.steelKg);
 }
 
 function trussCase(
