@@ -86,6 +86,7 @@ export function keyLine(input: KeyLineInput): Piece {
       sections.map((section, index) => {
         const x = lefts[index] ?? 0;
         const number = String(section.number);
+        // The spaces behind the words part them when they are read aloud.
         return el(
           'a',
           { href: section.href, class: 'post', 'aria-label': `${number} ${section.name}` },
@@ -98,10 +99,15 @@ export function keyLine(input: KeyLineInput): Piece {
             'fill-opacity': 0,
           }),
           el('path', { d: `M${num(x)},${num(y - 5.5)}v11`, stroke: colours.ink, 'stroke-width': pens.thick }),
-          label(named ? x - 1.5 : x, y + 19, number, { weight: 600, anchor: named ? 'start' : 'middle' }),
+          label(named ? x - 1.5 : x, y + 19, `${number} `, {
+            weight: 600,
+            anchor: named ? 'start' : 'middle',
+          }),
           named &&
             (names[index] ?? []).map((line, row) =>
-              label(x + numberWidth(section.number) + 4, y + 19 + row * 13, line, { fill: colours.second }),
+              label(x + numberWidth(section.number) + 4, y + 19 + row * 13, `${line} `, {
+                fill: colours.second,
+              }),
             ),
         );
       }),

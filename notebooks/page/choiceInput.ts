@@ -43,10 +43,10 @@ export function choiceInput<T extends string>(spec: ChoiceSpec<T>): ChoiceInput<
     field.className = `fig ${value === 'unknown' ? 'unknown' : origin}${isRefused ? ' refused' : ''}`;
     if (isRefused) {
       field.setAttribute('aria-invalid', 'true');
-      field.setAttribute('aria-errormessage', refusal.element.id);
+      field.setAttribute('aria-describedby', refusal.element.id);
     } else {
       field.removeAttribute('aria-invalid');
-      field.removeAttribute('aria-errormessage');
+      field.removeAttribute('aria-describedby');
       refusal.clear();
     }
   };

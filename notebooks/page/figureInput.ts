@@ -104,10 +104,10 @@ export function figureInput(spec: FigureSpec): FigureInput {
     );
     if (isRefused) {
       field.setAttribute('aria-invalid', 'true');
-      field.setAttribute('aria-errormessage', refusal.element.id);
+      field.setAttribute('aria-describedby', refusal.element.id);
     } else {
       field.removeAttribute('aria-invalid');
-      field.removeAttribute('aria-errormessage');
+      field.removeAttribute('aria-describedby');
     }
   };
   const write = (): void => {

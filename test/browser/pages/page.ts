@@ -1,12 +1,21 @@
 import example from '../../../data/examples/low-ferry.json' with { type: 'json' };
-import { parseStudy, sentence } from '../../../lib/index.ts';
+import { parseStudy, readStudy, sentence, writeStudy } from '../../../lib/index.ts';
 import type { Study } from '../../../lib/index.ts';
 import { el } from '../../../notebooks/drawing/piece.ts';
 import { sheet as drawing } from '../../../notebooks/drawing/sheet.ts';
 import { fixed } from '../../../notebooks/format.ts';
 import { h } from '../../../notebooks/html.ts';
-import { choiceInput, fieldsOf, figureInput, sheet, studyStore } from '../../../notebooks/page/index.ts';
-import type { Figure } from '../../../notebooks/page/index.ts';
+import {
+  choiceInput,
+  deviceCupboard,
+  fieldsOf,
+  figureInput,
+  putAt,
+  sheet,
+  studyShelf,
+  studyStore,
+} from '../../../notebooks/page/index.ts';
+import type { Figure, Path } from '../../../notebooks/page/index.ts';
 import { graph } from '../../../notebooks/reactive/index.ts';
 
 /** A notebook of a few cells, so that the page can be tried without the pipeline behind it. */
@@ -49,8 +58,7 @@ const page = sheet(g, {
 });
 const { live, cell, section } = page;
 
-const counts = { spans: 0, cost: 0 };
-const view = { counts, told, depth: () => g.state(depth), state: () => g.state(cost) };
+const counts = { crossing: 0, cost: 0 };
 
 page.mount(document.body, {
   bar: {
@@ -147,7 +155,7 @@ page.mount(document.body, {
           title: 'Crossing',
           shows: { brief, spans },
           body: ({ spans: all }, { widthPx }) => {
-            counts.spans += 1;
+            counts.crossing += 1;
             const perM = (widthPx - 20) / all.reduce((sum, span) => sum + span, 0);
             const at = all.map((_, i) => 10 + all.slice(0, i).reduce((sum, span) => sum + span, 0) * perM);
             return drawing(widthPx, 120, 'Spans', [
@@ -209,27 +217,32 @@ page.mount(document.body, {
         notes: h('p', {}, 'Median of the plates.'),
       }),
     ]),
-    section(3, 'Cost and ranking', live({ rank }, ({ rank: where }) => `It is ${where} the budget.`), [
-      cell({
-        station: '3+010',
-        title: 'Cost',
-        shows: { cost },
-        wide: true,
-        body: ({ cost: price }, { widthPx }) => {
-          counts.cost += 1;
-          return drawing(widthPx, 460, 'Cost', [
-            el('path', { d: `M0,20H${price * 60}`, stroke: '#376DC6', 'stroke-width': 9 }),
-            el('text', { x: price * 60 + 8, y: 24 }, `${fixed(price, 1)} M€`),
-          ]);
-        },
-      }),
-      cell({
-        station: '3+020',
-        title: 'Ranking',
-        shows: { rank },
-        body: ({ rank: where }) => h('p', {}, `The first option is ${where} the budget.`),
-      }),
-    ]),
+    section(
+      3,
+      'Cost and ranking',
+      live({ rank }, ({ rank: where }) => `It is ${where} the budget.`),
+      [
+        cell({
+          station: '3+010',
+          title: 'Cost',
+          shows: { cost },
+          wide: true,
+          body: ({ cost: price }, { widthPx }) => {
+            counts.cost += 1;
+            return drawing(widthPx, 460, 'Cost', [
+              el('path', { d: `M0,20H${price * 60}`, stroke: '#376DC6', 'stroke-width': 9 }),
+              el('text', { x: price * 60 + 8, y: 24 }, `${fixed(price, 1)} M€`),
+            ]);
+          },
+        }),
+        cell({
+          station: '3+020',
+          title: 'Ranking',
+          shows: { rank },
+          body: ({ rank: where }) => h('p', {}, `The first option is ${where} the budget.`),
+        }),
+      ],
+    ),
     ...[
       'Programme, carbon, upkeep',
       'Trade-offs',
@@ -255,13 +268,51 @@ page.mount(document.body, {
   ],
 });
 
-Object.assign(window, {
-  page: {
-    view,
-    answer: () => answer?.(0),
-    fail: (words: string) => fail?.(new Error(words)),
-    settled: () => g.settled(),
-    store,
-    startM: () => store.valid().brief.crossing.startM,
+const setField = (path: Path, value: unknown): void => store.edit((study) => putAt(study, path, value));
+
+/** What the test asks of the page. */
+const trial = {
+  counts,
+  told,
+  setDepth: (metres: number): void => g.set(depth, metres),
+  setEnd: (metres: number): void => setField(['brief', 'crossing', 'endM'], metres),
+  /** Ends the slow run under way well, once it has begun. */
+  answer: async (): Promise<void> => {
+    await Promise.resolve();
+    answer?.(0);
+    await g.settled();
   },
-});
+  /** Ends the slow run under way with a failure. */
+  fail: async (words: string): Promise<void> => {
+    await Promise.resolve();
+    fail?.(new Error(words));
+    await g.settled();
+  },
+  valid: (): Study => store.valid(),
+  draft: (): Study => {
+    const state = g.state(store.draft);
+    if (state.state !== 'ready') throw new Error('the draft is always there');
+    return state.value;
+  },
+  /** Two pages that keep a study on the device: what each is told. */
+  device: async () => {
+    const name = `trial-${crypto.randomUUID()}`;
+    const format = { readStudy, writeStudy };
+    const one = studyShelf(await deviceCupboard(name), format, () => new Date());
+    const other = studyShelf(await deviceCupboard(name), format, () => new Date());
+    const study = store.valid();
+    const first = await one.save('a', { ...study, title: 'First' }, 0);
+    const second = await other.save('a', { ...study, title: 'Second' }, 1);
+    const late = await one.save('a', { ...study, title: 'Late' }, 1);
+    const loaded = await one.load('a');
+    return {
+      saved: [first, second].map((result) => (result.ok ? result.value.revision : null)),
+      title: loaded.ok ? loaded.value.study.title : null,
+      refused: late.ok ? [] : late.problems.map(({ code }) => code),
+      listed: (await other.list()).map(({ title }) => title),
+    };
+  },
+};
+export type Trial = typeof trial;
+
+Object.assign(window, { trial });

@@ -1,0 +1,53 @@
+import { describe, expect, it } from 'vitest';
+import { frames } from '../../notebooks/page/frames.ts';
+
+/** A screen whose frames come when they are told to. */
+function screen() {
+  let runs: (() => void)[] = [];
+  const queue = frames((run) => runs.push(run));
+  const frame = (): void => {
+    const now = runs;
+    runs = [];
+    for (const run of now) run();
+  };
+  return { queue, frame, asked: () => runs.length };
+}
+
+describe('frames', () => {
+  it('request(job) runs a job once a frame however often it was asked for', () => {
+    const { queue, frame, asked } = screen();
+    let count = 0;
+    const job = (): void => void (count += 1);
+    for (let i = 0; i < 50; i += 1) queue.request(job);
+    expect(asked()).toBe(1);
+    expect(count).toBe(0);
+    frame();
+    expect(count).toBe(1);
+    frame();
+    expect(count).toBe(1);
+  });
+
+  it('request(job) from inside a frame waits for the next one', () => {
+    const { queue, frame } = screen();
+    const seen: string[] = [];
+    const second = (): void => void seen.push('second');
+    queue.request(() => {
+      seen.push('first');
+      queue.request(second);
+    });
+    frame();
+    expect(seen).toEqual(['first']);
+    frame();
+    expect(seen).toEqual(['first', 'second']);
+  });
+
+  it('flush() runs what waits now, and the frame that comes then finds nothing', () => {
+    const { queue, frame } = screen();
+    let count = 0;
+    queue.request(() => void (count += 1));
+    queue.flush();
+    expect(count).toBe(1);
+    frame();
+    expect(count).toBe(1);
+  });
+});
