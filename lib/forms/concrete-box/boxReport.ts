@@ -76,6 +76,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     lastingStressMPa: tendons.stress.lastingMPa,
     eccentricityMidspanM: Math.max(...tendons.eccentricityM),
     eccentricityPierM: Math.min(...tendons.eccentricityM),
+    endDiaphragmKN: model.standard.unitWeights.concreteKNm3 * own.diaphragmM3[0]!,
     shearDesignKN: box.shear.mostKN,
     concreteM3M2: concreteM3 / areaM2,
     barsKgM3: barsKg / concreteM3,

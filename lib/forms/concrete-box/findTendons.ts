@@ -40,6 +40,9 @@ export interface Tendons {
 /** What the search starts from: the tendons of the pass before. */
 export type TendonStart = Pick<Tendons, 'drape' | 'strandsPerWeb' | 'forceKN' | 'steadiedKN'>;
 
+/** Strands of a web by which the first pass judges the room of the tendons. */
+const firstGuess = 48;
+
 /**
  * Finds the drape that needs the least force for service and ultimate bending, rounds up to whole strands in every web,
  * and adds strands where the exact ultimate check still asks for more.
@@ -53,7 +56,7 @@ export function findTendons(
 ): Tendons {
   const { webs } = model.layout;
   const most = mostStrandsPerWeb(model);
-  const group = tendonGroup(before?.strandsPerWeb ?? 4 * boxData.tendons[1]!.strands);
+  const group = tendonGroup(before?.strandsPerWeb ?? firstGuess);
   const straight = straightStress(model);
   const straightStrands = launch
     ? evenly(launch.forceKN / (straight.initialMPa * 1e3 * model.strandM2), 2 * webs)
@@ -98,7 +101,7 @@ export function findTendons(
       parasiticM,
     });
   const wanted = Math.ceil(found.forceKN / perStrandKN / webs - 1e-6);
-  let strandsPerWeb = Math.min(most, Math.max(boxData.tendons[0]!.strands, wanted));
+  let strandsPerWeb = Math.min(most, Math.max(boxData.tendons.sizes[0]!.strands, wanted));
   let [sag, hog] = bend(strandsPerWeb);
   // The slab over the piers may still have to grow: the first pass does not answer for it with strands.
   while (before && Math.max(sag.use, hog.use) > 1 && strandsPerWeb < most) {
@@ -132,7 +135,7 @@ export function findTendons(
 /** Strands a web can hold in its rows at the high and low points. */
 export function mostStrandsPerWeb(model: BoxModel): number {
   const { tendonRows, tendons } = boxData;
-  const { strands, ductM } = tendons[tendons.length - 1]!;
+  const { strands, ductM } = tendons.sizes[tendons.sizes.length - 1]!;
   const room = tendonRows.mostOverDepth * model.task.depthM;
   const rows = Math.max(1, Math.floor((room + tendonRows.gapM) / (ductM + tendonRows.gapM)));
   return rows * tendonRows.abreast * strands;

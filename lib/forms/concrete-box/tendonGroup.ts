@@ -13,9 +13,10 @@ export interface TendonGroup {
 
 /** The smallest tendon with which a web has the usual number or fewer, strands shared out evenly. */
 export function tendonGroup(strandsPerWeb: number): TendonGroup {
-  const { tendons, tendonRows, ductCoverM } = boxData;
-  const largest = tendons[tendons.length - 1]!;
-  const size = tendons.find(({ strands }) => strands * tendonRows.usualPerWeb >= strandsPerWeb) ?? largest;
+  const { tendonRows, ductCoverM } = boxData;
+  const { sizes } = boxData.tendons;
+  const largest = sizes[sizes.length - 1]!;
+  const size = sizes.find(({ strands }) => strands * tendonRows.usualPerWeb >= strandsPerWeb) ?? largest;
   const tendonsPerWeb = Math.max(1, Math.ceil(strandsPerWeb / size.strands));
   const rows = Math.ceil(tendonsPerWeb / tendonRows.abreast);
   const heightM = rows * size.ductM + (rows - 1) * tendonRows.gapM;
