@@ -38,7 +38,7 @@ export function deckZones(layout: StayLayout, symmetrical: boolean): DeckZone[] 
 }
 
 /** From a pylon to midspan towards the other pylon, or to the end of the unit, m. */
-export function reachOf(layout: StayLayout, pylon: number, side: -1 | 1): number {
+function reachOf(layout: StayLayout, pylon: number, side: -1 | 1): number {
   const { pylons, lengthM } = layout;
   const x = pylons[pylon]!.xM;
   const other = pylons[pylon + side];

@@ -2,7 +2,7 @@ import { supportPositions } from '../common/supports.ts';
 import { cableData } from './cableData.ts';
 
 /** One stay of one plane. */
-export interface Stay {
+interface Stay {
   /** Which pylon of the layout holds it. */
   readonly pylon: number;
   /** Side of the pylon on which the deck is held: -1 towards the start, +1 towards the end. */
@@ -22,7 +22,7 @@ export interface Stay {
   readonly count: number;
 }
 
-export interface PylonPlace {
+interface PylonPlace {
   /** Index of its support in the unit. */
   readonly support: number;
   readonly xM: number;

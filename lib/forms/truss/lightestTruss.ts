@@ -17,7 +17,7 @@ export interface Layout {
   readonly case: TrussCase;
 }
 
-export interface Candidate {
+interface Candidate {
   readonly layout: Layout;
   readonly truss: SizedTruss;
   readonly memberWidthM: number;

@@ -33,7 +33,7 @@ export interface MemberSection {
   readonly governs: MemberLimit;
 }
 
-export type MemberLimit = 'net-section' | 'yield' | 'buckling' | 'fatigue' | 'slenderness';
+type MemberLimit = 'net-section' | 'yield' | 'buckling' | 'fatigue' | 'slenderness';
 
 /** What sizing a member needs to know of the standard; made once for a truss by `memberRules`. */
 export interface MemberRules {

@@ -4,7 +4,7 @@ import { fatigueRange } from '../floor/fatigue.ts';
 import { trussGeometry, type MemberRole, type TrussGeometry } from './trussGeometry.ts';
 
 /** Axial forces of one member, kN, tension positive, characteristic. */
-export interface MemberForces {
+interface MemberForces {
   /** For a load of 1 kN at every inner floor node. */
   readonly perNode: number;
   readonly trafficMax: number;

@@ -3,7 +3,7 @@ import type { StandardId } from '../../model/index.ts';
 import type { MemberRules } from './memberSection.ts';
 
 /** Loads of one truss plane, kN per m of truss, characteristic. */
-export interface PlaneLoads {
+interface PlaneLoads {
   /** Slab and floor steel. */
   readonly floorKNm: number;
   readonly superimposedKNm: number;

@@ -6,7 +6,7 @@ import type { SizedMember } from './sizeTruss.ts';
 import type { TrussSpan } from './trussSpan.ts';
 
 /** Height of the bottom chord axis over the top of the slab, m (negative): the chord lies with its foot in the soffit. */
-export function chordAxisZ(span: TrussSpan, depthM: number): number {
+function chordAxisZ(span: TrussSpan, depthM: number): number {
   const bottom = span.truss.members.find(({ member }) => member.role === 'bottom-chord')!;
   return -depthM + bottom.section.depthM / 2;
 }
