@@ -11,6 +11,6 @@ export { guide, type Guide, type GuideForm } from './guide.ts';
 export { sentence } from './messages/index.ts';
 export { drawDrivers, drawRates, ratePacks, ratesFor } from './price/index.ts';
 export { depthBand, endRatioWindow, spanWindow } from './rules/index.ts';
-export { groundAt, roadLevelAt, soffitLimitAt, stretchAt, survey, waterDepthAt } from './site/index.ts';
+export { constructionDepth, groundAt, roadLevelAt, soffitLimitAt, stretchAt, survey, waterDepthAt } from './site/index.ts';
 export { fingerprint, parseStudy, readStudy, writeStudy } from './study/index.ts';
 export { items } from './takeoff/index.ts';

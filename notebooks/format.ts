@@ -37,6 +37,14 @@ export function significant(value: number, figures: number): string {
   return fixed(rounded, places);
 }
 
+/** A figure as somebody typed it, to three significant figures without idle zeros: 7.00 -> '7', 11.5 -> '11.5'. */
+export const plain = (value: number): string =>
+  Number.isFinite(value)
+    ? significant(value, 3)
+        .replace(/(\.\d*?)0+$/, '$1')
+        .replace(/\.$/, '')
+    : unknownMark;
+
 /** Money is printed to two significant figures. */
 export const money2 = (value: number): string => significant(value, 2);
 

@@ -1,4 +1,4 @@
-import { currencySign, listed, money2, moneyUnit, odds, significant } from '../format.ts';
+import { currencySign, listed, money2, moneyUnit, odds, plain, significant } from '../format.ts';
 import { linearAxis, spreadValues } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { interval } from '../drawing/interval.ts';
@@ -140,7 +140,7 @@ export function costIntervals(input: CostIntervalsInput): Piece {
         axis.x(budget),
         4,
         bottom,
-        `budget ${significant(budget / unit.per, 3)}`,
+        `budget ${plain(budget / unit.per)}`,
         ink.accent,
         right + (narrow ? 80 : 140),
       ),

@@ -1,5 +1,5 @@
 import { scaleLog } from 'd3-scale';
-import { fixed, money2, moneyUnit, odds, significant } from '../format.ts';
+import { fixed, money2, moneyUnit, odds, plain } from '../format.ts';
 import { linearAxis } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
@@ -275,7 +275,7 @@ export function tradeOffs(input: TradeOffsInput): Piece {
             ),
           ),
           budget !== null &&
-            label(moneyRoom + panelWidth, y(budget) - 5, `budget ${significant(budget / unit.per, 3)}`, {
+            label(moneyRoom + panelWidth, y(budget) - 5, `budget ${plain(budget / unit.per)}`, {
               anchor: 'end',
               size: letters.table,
               weight: 600,

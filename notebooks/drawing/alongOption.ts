@@ -1,4 +1,5 @@
 import type { AppraisedOption, Design, Site, Unit, WorkedOption } from '../model.ts';
+import { constructionDepth } from '../model.ts';
 
 /** Straight-line reading of a table at x; the end values hold outside it. Empty tables give NaN. */
 export function readAt(xs: readonly number[], ys: readonly number[], x: number): number {
@@ -61,9 +62,13 @@ export function depthAt(option: WorkedOption, chainageM: number): number {
   return depth;
 }
 
-/** Soffit level at a chainage, m; NaN off the bridge. */
+/** Level of the underside as it is drawn on the road line, m; NaN off the bridge. */
 export const soffitLevel = (site: Site, option: WorkedOption, chainageM: number): number =>
   slabLevel(site, option, chainageM) - depthAt(option, chainageM);
+
+/** Level of the lowest soffit at a chainage, m, at the edge to which the carriageway falls; NaN off the bridge. */
+export const lowestSoffit = (site: Site, option: WorkedOption, chainageM: number): number =>
+  roadLevel(site, option, chainageM) - constructionDepth(site.deck, depthAt(option, chainageM));
 
 /** Highest of the lowest soffits allowed at a chainage, m; NaN where nothing limits it. */
 export function leastSoffit(site: Site, chainageM: number): number {

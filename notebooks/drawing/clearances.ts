@@ -1,5 +1,5 @@
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
-import { groundLevel, soffitLevel } from './alongOption.ts';
+import { groundLevel, lowestSoffit } from './alongOption.ts';
 import { dimensionChain, uprightDimension } from './dimension.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
@@ -66,7 +66,7 @@ export function envelopes(site: Site, obstacles?: readonly Obstacle[]): Envelope
 export function spareWords(site: Site, option: AppraisedOption | null, one: Envelope): string {
   if (option === null) return '';
   const places = [0, 0.25, 0.5, 0.75, 1].map((part) => one.fromM + part * (one.toM - one.fromM));
-  const least = Math.min(...places.map((at) => soffitLevel(site, option, at) - one.topLevelM));
+  const least = Math.min(...places.map((at) => lowestSoffit(site, option, at) - one.topLevelM));
   if (!Number.isFinite(least) || least >= 1) return '';
   return least < -0.005 ? `${level(-least)} too low` : `${level(least)} spare`;
 }

@@ -1,6 +1,6 @@
 import type { AppraisedOption, Site } from '../model.ts';
 import { chainage, level, unknownMark } from '../format.ts';
-import { groundLevel, leastSoffit, roadLevel, soffitLevel, supportChainages } from './alongOption.ts';
+import { groundLevel, leastSoffit, roadLevel, lowestSoffit, supportChainages } from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
@@ -31,7 +31,8 @@ export function bandChainages(site: Site, option: AppraisedOption | null, frame:
       const at = [0.5, 0, 1, 0.25, 0.75, 0.125, 0.875, 0.375, 0.625].map(
         (part) => limit.fromM + part * (limit.toM - limit.fromM),
       );
-      const room = (x: number): number => (option === null ? 0 : soffitLevel(site, option, x) - limit.levelM);
+      const room = (x: number): number =>
+        option === null ? 0 : lowestSoffit(site, option, x) - limit.levelM;
       return at.sort((one, other) => room(one) - room(other));
     });
   const tens: number[] = [];
@@ -89,7 +90,7 @@ export function dataBand(
   const places = bandChainages(site, option, frame);
   const show = (value: number): string => (Number.isFinite(value) ? level(value) : unknownMark);
   const spare = (at: number): number =>
-    option === null ? NaN : soffitLevel(site, option, at) - leastSoffit(site, at);
+    option === null ? NaN : lowestSoffit(site, option, at) - leastSoffit(site, at);
   const least = Math.min(...places.map(spare).filter(Number.isFinite));
   const limited = places.some((at) => Number.isFinite(leastSoffit(site, at)));
   const rows: Row[] = [
@@ -99,7 +100,7 @@ export function dataBand(
   if (option !== null) {
     rows.push(
       { name: 'road', figure: (at) => show(roadLevel(site, option, at)) },
-      { name: 'soffit', figure: (at) => show(soffitLevel(site, option, at)) },
+      { name: 'soffit', figure: (at) => show(lowestSoffit(site, option, at)) },
     );
   }
   if (limited) {

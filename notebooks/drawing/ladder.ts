@@ -1,7 +1,7 @@
-import { level } from '../format.ts';
+import { chainage, level } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
-import { depthAt, leastSoffit, placedUnits, roadLevel, soffitLevel } from './alongOption.ts';
+import { depthAt, leastSoffit, lowestSoffit, placedUnits, roadLevel } from './alongOption.ts';
 import { uprightDimension } from './dimension.ts';
 import type { Paper } from './ink.ts';
 import { colours, pens } from './ink.ts';
@@ -28,38 +28,113 @@ export function tightestOver(site: Site, option: AppraisedOption, obstacle: Obst
   let best = (fromM + toM) / 2;
   for (let step = 0; step <= 20; step += 1) {
     const at = fromM + ((toM - fromM) * step) / 20;
-    if (soffitLevel(site, option, at) < soffitLevel(site, option, best) - 1e-6) best = at;
+    if (lowestSoffit(site, option, at) < lowestSoffit(site, option, best) - 1e-6) best = at;
   }
   return best;
 }
 
-/** Everything between an obstacle and the road as a ladder at 1:100: road, surfacing, structure, spare, envelope (broken), datum. */
+/** One step of the ladder: a dimension at its left with its words. */
+interface Rung {
+  readonly top: number;
+  readonly bottom: number;
+  readonly words: string;
+  readonly colour: string;
+}
+
+/** Dimensions one below the other; words of thin steps move down until they clear those above. */
+function rungPieces(rungs: readonly Rung[], x: number): Piece[] {
+  let lastBase = -Infinity;
+  return rungs.map(({ top, bottom, words, colour }) => {
+    const base = Math.max((top + bottom) / 2 + 4, lastBase + 13);
+    lastBase = base;
+    return g(
+      {},
+      uprightDimension(x, top, bottom, '', { side: 'left', colour }),
+      label(x - 6, base, words, { anchor: 'end', fill: colour, halo: true }),
+    );
+  });
+}
+
+/** Levels and heights of the ladder, m, and their places, px (y...). */
+interface Levels {
+  readonly road: number;
+  readonly soffit: number;
+  readonly least: number;
+  readonly depth: number;
+  readonly surfacing: number;
+  readonly spare: number;
+  readonly fall: number;
+  readonly yRoad: number;
+  readonly ySlab: number;
+  readonly yUnder: number;
+  readonly ySoffit: number;
+  readonly yLeast: number;
+  readonly yDatum: number;
+}
+
+function ladderLevels(site: Site, option: AppraisedOption, at: number, top: number): Levels {
+  const ppm = pxPerMetre(100);
+  const road = roadLevel(site, option, at);
+  const soffit = lowestSoffit(site, option, at);
+  const least = leastSoffit(site, at);
+  const depth = depthAt(option, at);
+  const surfacing = site.deck.surfacingM;
+  const ySlab = top + surfacing * ppm;
+  const yUnder = ySlab + depth * ppm;
+  const ySoffit = top + (road - soffit) * ppm;
+  const yLeast = Number.isFinite(least) ? ySoffit + (soffit - least) * ppm : ySoffit;
+  return {
+    road,
+    soffit,
+    least,
+    depth,
+    surfacing,
+    spare: soffit - least,
+    fall: road - surfacing - depth - soffit,
+    yRoad: top,
+    ySlab,
+    yUnder,
+    ySoffit,
+    yLeast,
+    yDatum: Math.max(yLeast, ySoffit) + 96,
+  };
+}
+
+/** Outline of the envelope down to its datum, broken once because its height is not drawn in full. */
+function brokenEnvelope(
+  left: number,
+  right: number,
+  yLeast: number,
+  yDatum: number,
+  chamfer: number,
+): string {
+  const b = yDatum - 40;
+  const n = num;
+  return (
+    `M${n(left)},${n(yDatum)}V${n(b + 6)}l-4,-2l8,-4l-4,-2V${n(yLeast + chamfer)}L${n(left + chamfer * 0.7)},${n(yLeast)}` +
+    `H${n(right - chamfer * 0.7)}L${n(right)},${n(yLeast + chamfer)}V${n(b - 2)}l4,2l-8,4l4,2V${n(yDatum)}`
+  );
+}
+
+/**
+ * Everything between an obstacle and the road as a ladder at 1:100, where least is left: road, surfacing, structure, fall
+ * of the carriageway to its edge, spare, envelope (broken) and the level it is measured from.
+ */
 export function ladder(input: LadderInput): Piece {
   const { site, option, obstacle } = input;
   const at = tightestOver(site, option, obstacle);
   const unit = placedUnits(option).find(({ fromM, toM }) => at >= fromM - 1e-6 && at <= toM + 1e-6);
   const form = unit?.unit.form ?? option.form;
   const ink = formInk(input.paper ?? 'colour', [form], input.prefix ?? 'ladder');
-  const ppm = pxPerMetre(100);
   const left = 96;
   const right = left + 112;
-  const top = 26;
-  const road = roadLevel(site, option, at);
-  const soffit = soffitLevel(site, option, at);
-  const least = leastSoffit(site, at);
-  const spare = soffit - least;
-  const datum = obstacle.clearance?.datumLevelM ?? NaN;
-  const depth = depthAt(option, at);
-  const surfacing = site.deck.surfacingM;
-  const yRoad = top;
-  const ySlab = yRoad + surfacing * ppm;
-  const ySoffit = ySlab + depth * ppm;
-  const yLeast = Number.isFinite(spare) ? ySoffit + spare * ppm : ySoffit;
-  const yDatum = yLeast + 96;
-  const broken = yLeast + 56;
+  const middle = (left + right) / 2;
   const markX = right + 30;
-  // Levels that nearly meet are lettered one below the other.
-  const apart = Math.max(0, 15 - Math.abs(yLeast - ySoffit));
+  const v = ladderLevels(site, option, at, 26);
+  const datum = obstacle.clearance?.datumLevelM ?? NaN;
+  const rail = obstacle.kind === 'railway';
+  const tooLow = v.spare < -0.005;
+  const spareWords = tooLow ? `${level(-v.spare)} too low` : `${level(v.spare)} spare`;
   const face = (y0: number, y1: number, fill: string, stroke: string): Piece =>
     el('rect', {
       x: left,
@@ -70,65 +145,77 @@ export function ladder(input: LadderInput): Piece {
       stroke,
       'stroke-width': pens.thin,
     });
-  const chamfer = obstacle.kind === 'railway' ? 18 : 0;
+  const rungs: Rung[] = [
+    { top: v.yRoad, bottom: v.ySlab, words: `${level(v.surfacing)} surfacing`, colour: colours.ink },
+    { top: v.ySlab, bottom: v.yUnder, words: `${level(v.depth)} structure`, colour: colours.ink },
+    ...(v.fall > 0.005
+      ? [{ top: v.yUnder, bottom: v.ySoffit, words: `${level(v.fall)} crossfall`, colour: colours.ink }]
+      : []),
+    ...(Number.isFinite(v.spare)
+      ? [
+          {
+            top: Math.min(v.ySoffit, v.yLeast),
+            bottom: Math.max(v.ySoffit, v.yLeast),
+            words: spareWords,
+            colour: tooLow ? ink.accent : colours.ink,
+          },
+        ]
+      : []),
+    ...(Number.isFinite(datum)
+      ? [{ top: v.yLeast, bottom: v.yDatum, words: level(v.least - datum), colour: ink.accent }]
+      : []),
+  ];
+  const datumWords = rail ? 'rail' : obstacle.kind === 'river' ? 'water' : obstacle.kind;
   return sheet(
     380,
-    yDatum + 30,
-    `Levels over ${obstacle.name} at chainage ${at.toFixed(0)}: road ${level(road)}, soffit ${level(soffit)}, lowest allowed ${level(least)}`,
+    v.yDatum + 24,
+    `Levels over ${obstacle.name} at chainage ${chainage(at)}: road ${level(v.road)}, lowest soffit ${level(v.soffit)}, lowest allowed ${level(v.least)}`,
     [
       ink.defs.length > 0 && el('defs', {}, ink.defs),
-      face(ySlab, ySoffit, ink.face(form), ink.line(form)),
-      face(yRoad, ySlab, colours.ink, 'none'),
       el('path', {
-        d: `M${num(left)},${num(ySoffit)}H${num(right)}`,
+        d: [v.yRoad, v.ySoffit, v.yLeast, v.yDatum]
+          .map((y) => `M${num(right + 4)},${num(y)}H${num(markX + 8)}`)
+          .join(''),
+        stroke: colours.rule,
+        'stroke-width': pens.fine,
+      }),
+      face(v.ySlab, v.yUnder, ink.face(form), ink.line(form)),
+      face(v.yRoad, v.ySlab, colours.ink, 'none'),
+      // The soffit falls with the carriageway: lowest at the edge.
+      el('path', {
+        d: `M${num(middle)},${num(v.yUnder)}L${num(right)},${num(v.ySoffit)}V${num(v.yUnder)}Z`,
+        fill: ink.face(form),
+        stroke: ink.line(form),
+        'stroke-width': pens.thin,
+      }),
+      el('path', {
+        d: `M${num(left)},${num(v.yUnder)}H${num(middle)}L${num(right)},${num(v.ySoffit)}`,
+        fill: 'none',
         stroke: ink.line(form),
         'stroke-width': pens.heavy,
       }),
       el('path', {
-        d: `M${num(left)},${num(yDatum)}V${num(broken + 6)}l-4,-2l8,-4l-4,-2V${num(yLeast + chamfer)}L${num(left + chamfer * 0.7)},${num(yLeast)}H${num(right - chamfer * 0.7)}L${num(right)},${num(yLeast + chamfer)}V${num(broken - 2)}l4,2l-8,4l4,2V${num(yDatum)}`,
+        d: brokenEnvelope(left, right, v.yLeast, v.yDatum, rail ? 18 : 0),
         fill: 'none',
         stroke: ink.accent,
         'stroke-width': pens.thick,
       }),
-      obstacle.kind === 'railway' &&
+      rail &&
         el('path', {
-          d: `M${num((left + right) / 2 - 26)},${num(yDatum + 7)}h52M${num((left + right) / 2 - 15)},${num(yDatum)}v5M${num((left + right) / 2 + 15)},${num(yDatum)}v5`,
+          d: `M${num(middle - 26)},${num(v.yDatum + 7)}h52M${num(middle - 15)},${num(v.yDatum)}v5M${num(middle + 15)},${num(v.yDatum)}v5`,
           stroke: colours.ink,
           'stroke-width': pens.heavy,
           fill: 'none',
         }),
-      uprightDimension(left - 18, yRoad, ySlab, `${level(surfacing)} surfacing`, { side: 'left' }),
-      uprightDimension(left - 18, ySlab, ySoffit, `${level(depth)} structure`, { side: 'left' }),
-      spare > 0.005 &&
-        uprightDimension(left - 18, ySoffit, yLeast, `${level(spare)} spare`, { side: 'left' }),
-      Number.isFinite(datum) &&
-        uprightDimension(left - 18, yLeast, yDatum, level(least - datum), {
-          side: 'left',
-          colour: ink.accent,
+      rungPieces(rungs, left - 18),
+      levelMark(markX, v.yRoad, `${level(v.road)} road`),
+      levelMark(markX, v.ySoffit, `${level(v.soffit)} lowest soffit`),
+      Number.isFinite(v.least) &&
+        label(markX + 12, Math.max(v.yLeast + 4, v.ySoffit + 12), `${level(v.least)} lowest allowed`, {
+          fill: ink.accent,
+          halo: true,
         }),
-      g(
-        {},
-        el('path', {
-          d: [yRoad, ySoffit, yLeast, yDatum]
-            .map((y) => `M${num(right + 4)},${num(y)}H${num(markX + 8)}`)
-            .join(''),
-          stroke: colours.rule,
-          'stroke-width': pens.fine,
-        }),
-        levelMark(markX, yRoad, `${level(road)} road`),
-        levelMark(markX, ySoffit, `${level(soffit)} soffit`),
-        Number.isFinite(least) &&
-          label(markX + 12, yLeast + 12 + apart * 0.2, `${level(least)} lowest allowed`, {
-            fill: ink.accent,
-            halo: true,
-          }),
-        Number.isFinite(datum) &&
-          levelMark(
-            markX,
-            yDatum,
-            `${level(datum)} ${obstacle.kind === 'railway' ? 'rail' : obstacle.kind === 'river' ? 'water' : 'road below'}`,
-          ),
-      ),
+      Number.isFinite(datum) && levelMark(markX, v.yDatum, `${level(datum)} ${datumWords}`),
     ],
   );
 }

@@ -1,4 +1,4 @@
-import { currencySign, length, money2, odds, significant } from '../format.ts';
+import { currencySign, length, money2, odds, plain, significant } from '../format.ts';
 import { glyph } from '../forms/glyph.ts';
 import type { AppraisedOption } from '../model.ts';
 import { spansOf, supportChainages } from './alongOption.ts';
@@ -94,9 +94,7 @@ export function narrowStack(shared: StackSheet): Piece {
     top = row.bottom + 4;
   }
   const budget =
-    input.budget === null
-      ? ''
-      : `Heavy tick: budget ${significant(input.budget / unit.per, 3)} ${unit.label}. `;
+    input.budget === null ? '' : `Heavy tick: budget ${plain(input.budget / unit.per)} ${unit.label}. `;
   return sheet(
     input.widthPx + stackOutset,
     top + 30,

@@ -78,7 +78,7 @@ export function section(input: SectionInput): Piece {
   const scale = input.scale ?? largestScale(2 * reach, widthPx - rightRoom - 8);
   const ppm = pxPerMetre(scale);
   const topY = 40;
-  const centre = Math.max(reach * ppm + 4, (widthPx - rightRoom) / 2);
+  const centre = reach * ppm + 4;
   const place: SectionPlace = {
     ppm,
     x: (xM) => centre + xM * ppm,
@@ -106,7 +106,9 @@ export function section(input: SectionInput): Piece {
     ...(chained ? edges.map((x) => `M${num(place.x(x))},${num(bottomY + 6)}V${num(chainY + 4)}`) : []),
   ].join('');
   const spoken = `${name}, ${level(widthM)} m wide, ${dimensions.map(({ words }) => words).join(', ')}, 1 to ${String(scale)}`;
-  return sheet(widthPx, input.bar === false ? barY - 20 : barY + 12, spoken, [
+  // No wider than it needs, so that checks or figures can stand beside it.
+  const width = Math.max(2 * reach * ppm + 8 + rightRoom, 330);
+  return sheet(width, input.bar === false ? barY - 20 : barY + 12, spoken, [
     ink.defs.length > 0 && el('defs', {}, ink.defs),
     el('path', { d: extensions, stroke: colours.rule, 'stroke-width': pens.fine, fill: 'none' }),
     cutPiece(design, place, ink, prefix, topY, bottomY, input.at),

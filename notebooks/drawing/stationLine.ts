@@ -82,38 +82,42 @@ function stretch(lineX: number, from: number, to: number, state: StationState, a
   );
 }
 
-/** Spans that leave the screen, drawn as one to its edge, where words say where they go. */
-function leavers(
-  names: readonly string[],
-  lineX: number,
-  from: number,
-  edge: { readonly y: number; readonly wordsY: number },
-  used: boolean,
-): Piece | null {
-  const [first] = names;
-  if (first === undefined) return null;
-  const words = [`${used ? 'from' : 'to'} ${first}`];
-  if (names.length > 1) words.push(`${String(names.length - 1)} more`);
-  // A narrow band takes the words on two lines.
-  const whole = words.join(', ');
-  const lines = textWidth(whole, letters.drawing) > lineX - 10 ? words : [whole];
-  const out = Math.min(bulge(Math.abs(edge.y - from)), Math.max(8, lineX - 4));
-  return g(
-    {},
-    el('path', {
-      d: `M${num(lineX)},${num(from)}C${num(lineX - out)},${num(from + (edge.y - from) * 0.2)} ${num(lineX - out)},${num(from + (edge.y - from) * 0.6)} ${num(lineX - out)},${num(edge.y)}`,
-      fill: 'none',
-      stroke: colours.ink,
-      'stroke-width': pens.thin,
-      'stroke-dasharray': used ? undefined : '4 3',
-    }),
-    lines.map((line, i) =>
-      label(lineX - 8, edge.wordsY + (used ? i : i + 1 - lines.length) * 13, line, {
-        anchor: 'end',
-        halo: true,
+/** Stations whose spans leave the screen over one edge of it. */
+interface Leavers {
+  readonly names: readonly string[];
+  readonly used: boolean;
+}
+
+/**
+ * Spans that leave the screen over one edge, those to what is used and those to what uses it each drawn as one, with
+ * words at the edge that say where they go.
+ */
+function leavers(kinds: readonly Leavers[], lineX: number, from: number, edgeY: number): Piece[] {
+  const down = edgeY > from;
+  let wordsY = down ? edgeY - 8 : edgeY + 14;
+  return kinds.flatMap(({ names, used }) => {
+    const [first] = names;
+    if (first === undefined) return [];
+    const words = [`${used ? 'from' : 'to'} ${first}`];
+    if (names.length > 1) words.push(`${String(names.length - 1)} more`);
+    // A narrow band takes the words on two lines.
+    const whole = words.join(', ');
+    const lines = textWidth(whole, letters.drawing) > lineX - 10 ? words : [whole];
+    const top = down ? wordsY - 13 * (lines.length - 1) : wordsY;
+    wordsY = down ? top - 13 : top + 13 * lines.length;
+    const endY = down ? top - 12 : top + 13 * (lines.length - 1) + 4;
+    const out = Math.min(bulge(Math.abs(edgeY - from)), Math.max(8, lineX - 4));
+    return [
+      el('path', {
+        d: `M${num(lineX)},${num(from)}C${num(lineX - out)},${num(from + (endY - from) * 0.2)} ${num(lineX - out)},${num(from + (endY - from) * 0.6)} ${num(lineX - out)},${num(endY)}`,
+        fill: 'none',
+        stroke: colours.ink,
+        'stroke-width': pens.thin,
+        'stroke-dasharray': used ? undefined : '4 3',
       }),
-    ),
-  );
+      ...lines.map((line, i) => label(lineX - 8, top + i * 13, line, { anchor: 'end', halo: true })),
+    ];
+  });
 }
 
 /** The station line in its band, to be laid over the left of the sheet. */
@@ -122,19 +126,24 @@ export function stationLine(input: StationLineInput): Piece {
   const { marks, joined, view } = input;
   const yOf = new Map(marks.map((mark) => [mark.name, mark.y]));
   const at = joined === undefined ? undefined : yOf.get(joined.at);
-  const inView = (y: number): boolean => view === undefined || (y >= view.top && y <= view.bottom);
-  const place = (names: readonly string[]): { seen: [string, number][]; gone: string[] } => {
+  const { top, bottom } = view ?? { top: -Infinity, bottom: Infinity };
+  const place = (names: readonly string[] = []) => {
     const known = names.flatMap((name) => {
       const y = yOf.get(name);
-      return y === undefined ? [] : [[name, y] as [string, number]];
+      return y === undefined ? [] : [{ name, y }];
     });
     return {
-      seen: known.filter(([, y]) => inView(y)),
-      gone: known.filter(([, y]) => !inView(y)).map(([name]) => name),
+      seen: known.filter(({ y }) => y >= top && y <= bottom),
+      above: known.filter(({ y }) => y < top).map(({ name }) => name),
+      below: known.filter(({ y }) => y > bottom).map(({ name }) => name),
     };
   };
-  const uses = place(joined?.uses ?? []);
-  const usedBy = place(joined?.usedBy ?? []);
+  const uses = place(joined?.uses);
+  const usedBy = place(joined?.usedBy);
+  const over = (side: 'above' | 'below'): Leavers[] => [
+    { names: uses[side], used: true },
+    { names: usedBy[side], used: false },
+  ];
   let from = 0;
   let state: StationState = 'done';
   const stretches: Piece[] = [];
@@ -180,13 +189,11 @@ export function stationLine(input: StationLineInput): Piece {
               }),
       ),
       at !== undefined && [
-        uses.seen.map(([, y]) => span(lineX, at, y, true)),
-        usedBy.seen.map(([, y]) => span(lineX, at, y, false)),
+        uses.seen.map(({ y }) => span(lineX, at, y, true)),
+        usedBy.seen.map(({ y }) => span(lineX, at, y, false)),
         el('circle', { cx: lineX, cy: at, r: 5, fill: colours.ink }),
-        view !== undefined &&
-          leavers(uses.gone, lineX, at, { y: view.top + 18, wordsY: view.top + 14 }, true),
-        view !== undefined &&
-          leavers(usedBy.gone, lineX, at, { y: view.bottom - 20, wordsY: view.bottom - 8 }, false),
+        leavers(over('above'), lineX, at, top),
+        leavers(over('below'), lineX, at, bottom),
       ],
     ],
     'img',

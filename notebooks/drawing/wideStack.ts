@@ -1,4 +1,4 @@
-import { currencySign, length, money2, odds, significant, spansText } from '../format.ts';
+import { currencySign, length, money2, odds, plain, significant, spansText } from '../format.ts';
 import { glyph } from '../forms/glyph.ts';
 import type { AppraisedOption } from '../model.ts';
 import { spansOf, supportChainages } from './alongOption.ts';
@@ -151,7 +151,7 @@ function budgetLine(shared: StackSheet, top: number, bottom: number, words: bool
   const { input, axis, unit, ink } = shared;
   if (input.budget === null) return null;
   const x = axis.x(input.budget);
-  const text = `budget ${significant(input.budget / unit.per, 3)}`;
+  const text = `budget ${plain(input.budget / unit.per)}`;
   const half = textWidth(text, letters.drawing, 600) / 2;
   return g(
     { class: 'budget' },

@@ -19,6 +19,7 @@ import {
   signed,
   significant,
   spansText,
+  plain,
 } from '../../notebooks/format.ts';
 import { formLooks } from '../../notebooks/forms/formLook.ts';
 import { tint } from '../../notebooks/forms/formInk.ts';
@@ -47,6 +48,9 @@ describe('figures as printed', () => {
   it('significant(value, 3) rounds a value that gains a digit', () => {
     expect(significant(9.996, 3)).toBe('10.0');
     expect(significant(-0.04567, 2)).toBe('\u22120.046');
+  });
+  it('plain(value) drops idle zeros', () => {
+    expect([7, 11.5, 12.34, 120, 0.5].map(plain)).toEqual(['7', '11.5', '12.3', '120', '0.5']);
   });
   it('odds(share) goes in steps of five and never says 0 or 100', () => {
     expect([0, 0.02, 0.03, 0.5, 0.62, 0.63, 0.97, 0.98, 1].map(odds)).toEqual([
