@@ -123,5 +123,9 @@ export function optionFacts(
   for (const id of ['trussHeightM', 'pylonHeightM', 'boxInnerHeightM'] as const) {
     if (figures[id] !== undefined) known[id] = figures[id];
   }
+  // One pylon holds a main span from one end: as tall as one of two pylons of a span twice as long.
+  if (main.pylons?.length === 1 && figures['pylonHeightM'] !== undefined) {
+    known['pylonHeightRatio'] = figures['pylonHeightM'] / (2 * Math.max(...spansOf(main)));
+  }
   return known;
 }

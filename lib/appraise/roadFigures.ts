@@ -35,7 +35,9 @@ function holdsOn(at: At): Hold[] {
   );
   if (touched.length === 0) return [];
   if (profile.startRiseM === 0 || profile.endRiseM === 0) return touched.slice(0, 1);
-  const apart = touched.filter((hold) => hold.by === 'clearance' && hold.chainageM !== (touched[0] as { chainageM: number }).chainageM);
+  const apart = touched.filter(
+    (hold) => hold.by === 'clearance' && hold.chainageM !== (touched[0] as { chainageM: number }).chainageM,
+  );
   const most = site.road.mayRiseM;
   const second: Hold | undefined =
     Math.abs(Math.abs(profile.gradient) - site.road.maxGradient) < TOUCHES
@@ -167,7 +169,8 @@ function endAt(at: At): string | null {
   const { site } = at.appraisal;
   const x = place(at);
   const limit = site.soffitLimits.findIndex(({ fromM, toM }) => fromM === x || toM === x);
-  if (limit >= 0) return `site/soffitLimits/${limit}/${site.soffitLimits[limit]!.fromM === x ? 'fromM' : 'toM'}`;
+  if (limit >= 0)
+    return `site/soffitLimits/${limit}/${site.soffitLimits[limit]!.fromM === x ? 'fromM' : 'toM'}`;
   return x === site.startM ? 'site/startM' : x === site.endM ? 'site/endM' : null;
 }
 
@@ -213,7 +216,10 @@ export const roadFigures: readonly Descriptor[] = [
       slope: 'site/road/fillSideSlope',
       gradient: 'site/road/maxGradient',
       proposed: ['site/road/startLevelM', 'site/road/endLevelM'],
-      ground: [`${at.root}/supports/0/groundLevelM`, `${at.root}/supports/${at.option.supports.length - 1}/groundLevelM`],
+      ground: [
+        `${at.root}/supports/0/groundLevelM`,
+        `${at.root}/supports/${at.option.supports.length - 1}/groundLevelM`,
+      ],
       rise: [`${at.root}/profile/startRiseM`, `${at.root}/profile/endRiseM`],
     }),
     compute: (v) =>
@@ -221,7 +227,9 @@ export const roadFigures: readonly Descriptor[] = [
         const before = v.proposed[i]! - v.ground[i]!;
         const h0 = Math.max(0, before);
         const h1 = Math.max(0, before + v.rise[i]!);
-        return total + ((v.width * (h1 ** 2 - h0 ** 2)) / 2 + (v.slope * (h1 ** 3 - h0 ** 3)) / 3) / v.gradient;
+        return (
+          total + ((v.width * (h1 ** 2 - h0 ** 2)) / 2 + (v.slope * (h1 ** 3 - h0 ** 3)) / 3) / v.gradient
+        );
       }, 0),
   }),
   described({
@@ -241,7 +249,11 @@ export const roadFigures: readonly Descriptor[] = [
     method: 'bend of the soffit',
     formula: 'place at which the depth along the deck bends under the limit, or a support',
     value: place,
-    inputs: (at) => ({ supports: at.option.units.flatMap(({ supportsM }, u) => supportsM.map((_, s) => `${at.root}/units/${u}/supportsM/${s}`)) }),
+    inputs: (at) => ({
+      supports: at.option.units.flatMap(({ supportsM }, u) =>
+        supportsM.map((_, s) => `${at.root}/units/${u}/supportsM/${s}`),
+      ),
+    }),
   }),
   described({
     path: overPlace('structureM'),
@@ -264,7 +276,10 @@ export const roadFigures: readonly Descriptor[] = [
       return depthAt(depthOf(at), place(at)) - constructionDepth(site.deck, 0);
     },
     inputs: (at) => ({
-      depths: at.option.designs.flatMap((_, u) => [`${at.root}/designs/${u}/depthM/support`, `${at.root}/designs/${u}/depthM/midspan`]),
+      depths: at.option.designs.flatMap((_, u) => [
+        `${at.root}/designs/${u}/depthM/support`,
+        `${at.root}/designs/${u}/depthM/midspan`,
+      ]),
     }),
   }),
   described({

@@ -68,9 +68,9 @@ async function start(): Promise<void> {
   const cells = studyCells(graph, store, appraiser());
   const page = sheet(graph);
 
-  const saved = h('span', { class: 'saved', role: 'status' }, problem);
+  const saved = h('span', { class: 'state', role: 'status' }, problem);
   const button = (words: string, act: () => void): HTMLElement =>
-    h('button', { type: 'button', onclick: act }, words);
+    h('button', { type: 'button', class: 'action', onclick: act }, words);
   const whole = (): Study => {
     const valid = store.valid();
     return { ...valid, options: { ...valid.options, register: cells.register() } };

@@ -1,11 +1,11 @@
 import type { AppraisedOption, Ruling } from '../../lib/index.ts';
-import { optionMark, ranking } from '../charts/ranking.ts';
+import { ranking } from '../charts/ranking.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
-import { answerWords, budgetOf } from './words.ts';
+import { budgetOf } from './words.ts';
 
 const effects: readonly Ruling['effect'][] = ['out', 'caution', 'to confirm', 'in favour'];
 
@@ -23,8 +23,7 @@ function rulingsOf(option: AppraisedOption): HTMLElement {
     h(
       'summary',
       {},
-      optionMark(option, null),
-      ` ${optionTitle(option)}: ${option.status}, ${option.rulings.filter((r) => r.effect === 'caution').length} cautions, ${option.rulings.filter((r) => r.effect === 'to confirm').length} to confirm`,
+      `Option ${option.number}, ${optionTitle(option)}: ${option.status}, ${option.rulings.filter((r) => r.effect === 'caution').length} to be cautious of, ${option.rulings.filter((r) => r.effect === 'to confirm').length} to confirm`,
     ),
     h(
       'table',
@@ -62,6 +61,7 @@ export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
       station: '10+010',
       title: 'Ranking',
       shows: { appraisal, reference, brief },
+      wide: true,
       body: (v) =>
         ranking({
           options: v.appraisal.options,
@@ -73,7 +73,6 @@ export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
       notes: (v) => [
         v.appraisal.standing.because.slice(1).map((words) => h('p', {}, words)),
         v.appraisal.dropped.map(({ form, because }) => h('p', {}, `${form} dropped: ${because.join('; ')}.`)),
-        h('p', { class: 'source' }, answerWords(v.appraisal)),
       ],
     }),
     page.cell({

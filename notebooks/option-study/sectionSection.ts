@@ -32,13 +32,15 @@ export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
         const checks = {
           form: v.reference.form,
           checks: design.checks,
-          widthPx: Math.min(420, room.widthPx),
+          widthPx: Math.min(350, room.widthPx),
           prefix: 'checks',
         };
-        return [
-          section({ design, widthPx: Math.min(620, room.widthPx), prefix: 'section' }),
-          h('div', { class: 'checks' }, checkBars(checks), tableBehind(checkTable(checks))),
-        ];
+        return h(
+          'div',
+          { class: 'beside' },
+          h('div', {}, section({ design, widthPx: Math.min(580, room.widthPx), prefix: 'section' })),
+          h('div', {}, checkBars(checks), tableBehind(checkTable(checks))),
+        );
       },
       notes: [
         h(

@@ -1,0 +1,309 @@
+import {
+  described,
+  type AppraisedOption,
+  type At,
+  type Described,
+  type Descriptor,
+  type Facts,
+  type Inputs,
+} from '../model/index.ts';
+import { factDictionary, printed, rule, withRatios, type Fact } from '../rules/index.ts';
+import { factsIn } from '../rules/limitsOn.ts';
+import { wholeCondition } from '../rules/verdictOf.ts';
+import { optionFacts } from './facts.ts';
+import { mainUnit, spansOf } from './workOption.ts';
+
+const known = new WeakMap<AppraisedOption, Facts>();
+
+/** Facts of an option as the rules were asked with them, ratios included. */
+function factsOf(at: At): Facts {
+  const { study, appraisal, option } = at;
+  const found =
+    known.get(option) ??
+    withRatios(
+      optionFacts(
+        study,
+        appraisal.site,
+        option,
+        option.headroom,
+        appraisal.standing.within[option.number] ?? 'unknown',
+      ),
+    );
+  known.set(option, found);
+  return found;
+}
+
+const factOf = (id: string): Fact => factDictionary.find((entry) => entry.id === id)!;
+const main = (at: At): number => at.option.units.indexOf(mainUnit(at.option.units));
+const design = (at: At): string => `${at.root}/designs/${main(at)}`;
+const mainSpans = (at: At): string[] =>
+  spansOf(mainUnit(at.option.units)).map((_, i) => `${design(at)}/task/spansM/${i}`);
+const mainEnds = (at: At): { readonly from: string; readonly to: string } => {
+  const supports = `${at.root}/units/${main(at)}/supportsM`;
+  return { from: `${supports}/0`, to: `${supports}/${mainUnit(at.option.units).supportsM.length - 1}` };
+};
+const designFigure =
+  (name: string) =>
+  (at: At): { readonly figure: string } => ({ figure: `${design(at)}/figures/${name}` });
+const everyDesign = (at: At, steps: string): string[] =>
+  at.option.designs.map((_, u) => `${at.root}/designs/${u}/${steps}`);
+const pieces = (at: At, field: string): string[] =>
+  at.option.designs.flatMap(({ heaviestPiece }, u) =>
+    heaviestPiece === null ? [] : [`${at.root}/designs/${u}/heaviestPiece/${field}`],
+  );
+const innerSupports = (at: At, steps: string): string[] =>
+  at.option.supports.slice(1, -1).map((_, s) => `${at.root}/supports/${s + 1}/${steps}`);
+const supports = (at: At): string[] => at.option.supports.map((_, s) => `${at.root}/supports/${s}/chainageM`);
+
+/** Where a fact comes from; facts without an entry here are read as they stand. */
+const fact = <const I extends Inputs>(
+  id: string,
+  formula: string,
+  inputs: (at: At) => I,
+  compute?: Described<I>['compute'],
+): Descriptor =>
+  described({
+    path: `options/:option/facts/${id}`,
+    label: factOf(id).label,
+    unit: factOf(id).unit,
+    method: 'fact for the rules',
+    formula,
+    value: (at) => factsOf(at)[id] ?? 'unknown',
+    inputs,
+    ...(compute === undefined ? {} : { compute }),
+  });
+
+const asIs = <const I extends Inputs>(
+  id: string,
+  inputs: (at: At) => I,
+  formula = factOf(id).meaning,
+): Descriptor => fact(id, formula, inputs, (v) => Object.values(v)[0] as number);
+
+const ratios = factDictionary.flatMap(({ id, ratioOf, addedToSecond = 0 }) =>
+  ratioOf === undefined
+    ? []
+    : [
+        fact(
+          id,
+          `${factOf(ratioOf[0]).label} / ${addedToSecond > 0 ? `(${factOf(ratioOf[1]).label} + ${addedToSecond} m)` : factOf(ratioOf[1]).label}`,
+          (at) => ({ first: `${at.root}/facts/${ratioOf[0]}`, second: `${at.root}/facts/${ratioOf[1]}` }),
+          ({ first, second }) => first / (second + addedToSecond),
+        ),
+      ],
+);
+
+/** Smaller end span over the span beside it. */
+function endRatio(spans: readonly number[]): number {
+  if (spans.length === 2) return Math.min(...spans) / Math.max(...spans);
+  return Math.min(spans[0]! / spans[1]!, spans.at(-1)! / spans.at(-2)!);
+}
+
+/** What the rules are asked with, fact by fact. */
+export const factFigures: readonly Descriptor[] = [
+  fact(
+    'mainSpanM',
+    'longest span of the main unit',
+    (at) => ({ spans: mainSpans(at) }),
+    ({ spans }) => Math.max(...spans),
+  ),
+  asIs('deckWidthM', () => ({ width: 'site/deck/widthM' })),
+  fact('planRadiusM', factOf('planRadiusM').meaning, () => ({ radius: 'site/planRadiusM' })),
+  asIs('skewDeg', () => ({ skew: 'site/skewDeg' })),
+  fact('continuity', 'continuous over inner supports, simple between two', (at) => ({
+    spans: mainSpans(at),
+  })),
+  fact('method', 'method of construction of the option', (at) => ({ spans: mainSpans(at) })),
+  fact(
+    'endSpanRatio',
+    'smaller end span / span beside it; of two spans the shorter / the longer',
+    (at) => ({ spans: mainSpans(at) }),
+    ({ spans }) => endRatio(spans),
+  ),
+  fact('pylons', 'pylons of the main unit', (at) => ({ spans: mainSpans(at) })),
+  fact('sideSpanRatio', 'smaller side span / main span; with one pylon the shorter / the longer', (at) => ({
+    spans: mainSpans(at),
+  })),
+  fact(
+    'supportsInRiver',
+    'inner supports that stand in water',
+    (at) => ({ depths: innerSupports(at, 'waterDepthM') }),
+    ({ depths }) => depths.filter((depth) => depth > 0).length,
+  ),
+  fact('supportsBarred', 'supports inside a stretch where none may stand', (at) => ({
+    supports: supports(at),
+    zones: at.appraisal.site.zones.flatMap(({ hard }, i) =>
+      hard ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
+    ),
+  })),
+  fact('unitLengthM', 'end - start of the main unit', mainEnds, ({ from, to }) => to - from),
+  fact('radiusConstant', 'a study has one radius for the whole crossing', () => ({
+    radius: 'site/planRadiusM',
+  })),
+  fact(
+    'haunched',
+    'depth at the supports differs from that at midspan',
+    (at) => ({
+      support: `${design(at)}/depthM/support`,
+      midspan: `${design(at)}/depthM/midspan`,
+    }),
+    ({ support, midspan }) => (support === midspan ? 0 : 1),
+  ),
+  ...(['falseworkOverRailway', 'falseworkOverWater'] as const).map((id) =>
+    fact(id, factOf(id).meaning, (at) => ({
+      ...mainEnds(at),
+      stretches:
+        id === 'falseworkOverWater'
+          ? at.appraisal.site.waters.flatMap((_, i) => [`site/waters/${i}/fromM`, `site/waters/${i}/toM`])
+          : at.appraisal.site.zones.flatMap(({ kind }, i) =>
+              kind === 'railway' ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
+            ),
+    })),
+  ),
+  fact(
+    'falseworkHeightM',
+    'greatest height from ground to soffit under the main unit; 0 without falsework',
+    (at) => ({
+      road: [`${at.root}/profile/startLevelM`, `${at.root}/profile/endLevelM`],
+      depth: `${at.root}/depthM/midspan`,
+      ground: at.option.supports.map((_, s) => `${at.root}/supports/${s}/groundLevelM`),
+    }),
+  ),
+  fact('prestressed', 'strand is measured in the main unit', (at) => ({
+    lines: at.option.designs[main(at)]!.lines.map((_, i) => `${design(at)}/lines/${i}/quantity`),
+  })),
+  asIs('supportDepthM', (at) => ({ depth: `${design(at)}/depthM/support` })),
+  asIs('midspanDepthM', (at) => ({ depth: `${design(at)}/depthM/midspan` })),
+  fact(
+    'limitingUtilisation',
+    'highest utilisation of all units',
+    (at) => ({ all: everyDesign(at, 'limitingCheck/utilisation') }),
+    ({ all }) => Math.max(...all),
+  ),
+  fact(
+    'clearanceConfirmed',
+    'every clearance has been confirmed by its authority',
+    (at) => ({
+      confirmed: at.study.brief.obstacles.flatMap(({ clearance }, i) =>
+        clearance === null ? [] : [`brief/obstacles/${i}/clearance/confirmed`],
+      ),
+    }),
+    ({ confirmed }) => (confirmed.every((one) => one === 1) ? 1 : 0),
+  ),
+  fact(
+    'upliftKN',
+    'greatest of -(permanent + least traffic) at the ends of the units, at least 0',
+    (at) => {
+      const ends = (field: string): string[] =>
+        at.option.designs.flatMap(({ reactions }, u) =>
+          [0, reactions.length - 1].map((s) => `${at.root}/designs/${u}/reactions/${s}/${field}`),
+        );
+      return { permanent: ends('permanentKN'), least: ends('trafficMinKN') };
+    },
+    ({ permanent, least }) => Math.max(0, ...permanent.map((one, i) => -(one + Math.min(0, least[i]!)))),
+  ),
+  fact(
+    'pieceLengthM',
+    'longest of the units',
+    (at) => ({ pieces: pieces(at, 'lengthM') }),
+    ({ pieces: all }) => Math.max(0, ...all),
+  ),
+  fact(
+    'pieceMassT',
+    'heaviest of the units',
+    (at) => ({ pieces: pieces(at, 'massT') }),
+    ({ pieces: all }) => Math.max(0, ...all),
+  ),
+  asIs('haulLengthM', () => ({ given: 'brief/access/haulLengthM' })),
+  asIs('haulMassT', () => ({ given: 'brief/access/haulMassT' })),
+  {
+    ...asIs('budgetChance', (at) => ({ chance: `standing/within/${at.option.number}` })),
+    when: (at) => at.study.brief.budget !== 'unknown',
+  },
+  fact('budgetChance', 'not known without a budget', () => ({ budget: 'brief/budget' })),
+  fact(
+    'roadRiseM',
+    'greater rise of the two ends',
+    (at) => ({ rises: [`${at.root}/profile/startRiseM`, `${at.root}/profile/endRiseM`] }),
+    ({ rises }) => Math.max(...rises),
+  ),
+  asIs('roadMayRiseM', () => ({ may: 'site/road/mayRiseM' })),
+  fact(
+    'gradient',
+    'steepness of the road, either way',
+    (at) => ({ gradient: `${at.root}/profile/gradient` }),
+    ({ gradient }) => Math.abs(gradient),
+  ),
+  asIs('maxGradient', () => ({ steepest: 'site/road/maxGradient' })),
+  asIs('headroomSpareM', (at) => ({
+    spare: `${at.root}/headroom${at.option.headroom === null ? '' : '/spareM'}`,
+  })),
+  ...(['trussHeightM', 'pylonHeightM', 'boxInnerHeightM'] as const).map((id) => asIs(id, designFigure(id))),
+  ...ratios,
+  described({
+    path: 'options/:option/facts/:fact',
+    label: (at) => factOf(at.name('fact')).label,
+    unit: (at) => factOf(at.name('fact')).unit,
+    method: 'fact for the rules',
+    formula: 'not known for this form',
+    value: (at) => factsOf(at)[at.name('fact')] ?? 'unknown',
+  }),
+];
+
+const ruleOf = (at: At) => rule(at.name('rule'));
+const rulingOf = (at: At) => at.option.rulings.find((ruling) => ruling.rule === at.name('rule'))!;
+const ruleFacts = (at: At): string[] =>
+  [...new Set(factsIn(wholeCondition(ruleOf(at))))].map((id) => `${at.root}/facts/${id}`);
+const flipFact = (at: At): Fact => factOf(rulingOf(at).flip!.fact);
+
+/** What the rules say of an option. */
+export const rulingFigures: readonly Descriptor[] = [
+  described({
+    path: 'options/:option/rulings/:rule/effect',
+    label: (at) => ruleOf(at).title,
+    unit: '',
+    method: 'rule',
+    formula: (at) => rulingOf(at).because.join('; '),
+    inputs: (at) => ({ facts: ruleFacts(at) }),
+    sources: (at) => ruleOf(at).sources,
+  }),
+  described({
+    path: 'options/:option/rulings/:rule/flip/from',
+    label: (at) => `${flipFact(at).label}, as it is`,
+    unit: (at) => rulingOf(at).flip!.unit,
+    method: 'fact for the rules',
+    formula: (at) => printed(flipFact(at), rulingOf(at).flip!.from),
+    inputs: (at) => ({ fact: `${at.root}/facts/${rulingOf(at).flip!.fact}` }),
+    compute: (v) => v.fact,
+  }),
+  described({
+    path: 'options/:option/rulings/:rule/flip/to',
+    label: (at) => `${flipFact(at).label} that would turn the ruling`,
+    unit: (at) => rulingOf(at).flip!.unit,
+    method: 'nearest limit of the rule',
+    formula: (at) => `${ruleOf(at).title}: first step past the limit, everything else as it is`,
+    inputs: (at) => ({ facts: ruleFacts(at) }),
+    sources: (at) => ruleOf(at).sources,
+  }),
+  described({
+    path: 'options/:option/status',
+    label: (at) => `status of option ${at.option.number}`,
+    unit: '',
+    method: 'rules',
+    formula: 'out: any rule puts it out; in: inside its usual span band and no caution; else possible',
+    inputs: (at) => ({ rulings: at.option.rulings.map(({ rule: id }) => `${at.root}/rulings/${id}/effect`) }),
+  }),
+  described({
+    path: 'droppedCounts/:i/count',
+    label: (at) => {
+      const { form, reason } = at.appraisal.droppedCounts[at.index('i')]!;
+      return `arrangements of ${form} not kept: ${reason}`;
+    },
+    unit: 'no',
+    method: 'count',
+    formula: (at) => at.appraisal.droppedCounts[at.index('i')]!.reason,
+    inputs: (at) => {
+      const { form } = at.appraisal.droppedCounts[at.index('i')]!;
+      return { length: 'site/lengthM', span: [`windows/${form}/span/least`, `windows/${form}/span/most`] };
+    },
+  }),
+];

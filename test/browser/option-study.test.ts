@@ -1,0 +1,132 @@
+import type { Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { openSite, type Heard, type Site } from './site.ts';
+
+let site: Site;
+beforeAll(async () => {
+  site = await openSite();
+});
+afterAll(() => site.close());
+
+const silent = (heard: Heard): void => {
+  expect(heard.console).toEqual([]);
+  expect(heard.elsewhere).toEqual([]);
+};
+
+/** Waits until the stack stands and nothing is being worked out. */
+async function settled(page: Page): Promise<void> {
+  await page.waitForSelector('[data-option]', { timeout: 60_000 });
+  await page.waitForFunction(
+    () => [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
+    undefined,
+    { timeout: 60_000 },
+  );
+}
+
+/** Types a figure into the field of that name and leaves it with Enter. */
+async function type(page: Page, name: string, value: string): Promise<void> {
+  const field = page.locator(`[role=spinbutton][aria-label^="${name},"]`).first();
+  await field.focus();
+  await page.keyboard.press('Control+a');
+  await page.keyboard.type(value);
+  await page.keyboard.press('Enter');
+}
+
+/** Rows of the ranking as text. */
+const ranking = (page: Page): Promise<string[]> =>
+  page.locator('.ranking tbody tr').evaluateAll((rows) => rows.map((row) => row.textContent));
+
+describe('option study', () => {
+  it('opens without a study on the worked example, fully worked out, and says nothing', async () => {
+    const { page, heard } = await site.open('option-study.html');
+    await settled(page);
+    expect(await page.locator('h1').textContent()).toBe('River Wend crossing at Low Ferry');
+    expect(await page.locator('.answer').textContent()).toMatch(/come out at .* M€, between/u);
+    const drawn = await page.locator('#\\33 \\+020 [data-option]').count();
+    expect(drawn).toBeGreaterThanOrEqual(4);
+    expect(await ranking(page)).toHaveLength(drawn);
+    expect(await page.locator('body').textContent()).toContain('Demo rates');
+    expect(await page.locator('body').textContent()).toContain('not for construction');
+    silent(heard);
+  });
+
+  it('a wider barred stretch lengthens the span, and everything follows', async () => {
+    const { page, heard } = await site.open('option-study.html');
+    await settled(page);
+    const before = await ranking(page);
+    await type(page, 'no-pier width', '80');
+    await page.waitForFunction(() => document.querySelector('#s2')?.textContent.includes('83 m asks'));
+    await page.waitForFunction(() => document.querySelector('.ranking tbody tr')?.textContent.includes('83'));
+    expect(await ranking(page)).not.toEqual(before);
+    silent(heard);
+  });
+
+  it('dearer steel moves the concrete box ahead of the composite girders', async () => {
+    const { page, heard } = await site.open('option-study.html');
+    await settled(page);
+    const first = (rows: string[]): string => rows[0]!;
+    expect(first(await ranking(page))).toContain('Composite I');
+    await type(page, 'steel rate', '7');
+    await page.waitForFunction(() =>
+      document.querySelector('.ranking tbody tr')?.textContent.includes('Concrete box'),
+    );
+    expect(await page.locator('.answer').textContent()).toMatch(/^Concrete box/u);
+    silent(heard);
+  });
+
+  it('more headroom over the railway lifts the road', async () => {
+    const { page, heard } = await site.open('option-study.html');
+    await settled(page);
+    const level = (): Promise<string | null> => page.locator('#s4 .finding').textContent();
+    const before = await level();
+    await type(page, 'headroom over Low Ferry branch, single track', '6.4');
+    await page.waitForFunction(
+      (words) => document.querySelector('#s4 .finding')?.textContent !== words,
+      before,
+    );
+    await settled(page);
+    expect(await level()).toMatch(/rises/u);
+    silent(heard);
+  });
+
+  it('a refused figure keeps the last good study and says what was expected', async () => {
+    const { page, heard } = await site.open('option-study.html');
+    await settled(page);
+    const before = await ranking(page);
+    await type(page, 'headroom over Low Ferry branch, single track', '-3');
+    await page.waitForFunction(() => document.querySelector('#s1')?.textContent.includes('at least'));
+    expect(await ranking(page)).toEqual(before);
+    silent(heard);
+  });
+
+  it('an edit can be undone, is saved on the device and opens again', async () => {
+    const { page, heard } = await site.open('option-study.html');
+    await settled(page);
+    await type(page, 'no-pier width', '70');
+    await page.waitForFunction(() => location.search.includes('study='));
+    await page.reload();
+    await settled(page);
+    expect(await page.locator('#s2').textContent()).toContain('73 m asks');
+    silent(heard);
+  });
+
+  it('a click on an elevation makes it the reference everywhere', async () => {
+    const { page, heard } = await site.open('option-study.html');
+    await settled(page);
+    const row = page.locator('[data-option]').nth(3);
+    const number = await row.getAttribute('data-option');
+    await row.click({ position: { x: 60, y: 20 } });
+    await page.waitForFunction(
+      (n) => document.querySelector('#s5 .finding')?.textContent.startsWith(`Option ${n} `),
+      number,
+    );
+    silent(heard);
+  });
+
+  it('the shelf leads to the study', async () => {
+    const { page, heard } = await site.open('index.html');
+    await page.getByRole('link', { name: 'open the worked example' }).click();
+    await settled(page);
+    silent(heard);
+  });
+});
