@@ -7,3 +7,4 @@ export * from './option.ts';
 export * from './ruling.ts';
 export * from './problem.ts';
 export * from './appraisal.ts';
+export * from './figure.ts';

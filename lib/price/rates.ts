@@ -87,7 +87,7 @@ export function ratesFor(books: Pick<Books, 'ratePack' | 'rates'>): Rates {
 }
 
 /** Standard normal deviate of the 90 % point. */
-const z90 = 1.2815515655446004;
+export const z90 = 1.2815515655446004;
 
 /** Spreads on the ln scale below and above the median of a rate or duration: two half-lognormals joined at P50. */
 export function halfSigmas(spread: Spread): { readonly low: number; readonly high: number } {

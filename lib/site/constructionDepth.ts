@@ -1,7 +1,7 @@
 import type { DeckSpec } from '../model/index.ts';
 
 /** Crossfall of the carriageway to both sides, as a ratio. Common practice, no source. */
-const CROSSFALL = 0.025;
+export const CROSSFALL = 0.025;
 
 /**
  * Construction depth, m: from the road level on the centre line down to the soffit, for a structural depth, m.

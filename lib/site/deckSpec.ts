@@ -4,17 +4,17 @@ import type { DeckSpec, DeckStrip, StandardId, StripKind } from '../model/index.
  * Surfacing, kN/m3. lm1: asphalt 23 to 25, EN 1991-1-1 table A.6 (from memory); hl93: bituminous wearing surface
  * 0.140 kcf, AASHTO LRFD table 3.5.1-1 (from memory).
  */
-const SURFACING_KN_M3: Readonly<Record<StandardId, number>> = { lm1: 23.5, hl93: 22 };
+export const SURFACING_KN_M3: Readonly<Record<StandardId, number>> = { lm1: 23.5, hl93: 22 };
 
 /** Raised footway and verge: 100 mm of fill and paving at 24 kN/m3. Common practice, no source. */
-const FOOTWAY_KN_M2 = 2.4;
+export const FOOTWAY_KN_M2 = 2.4;
 
 /** Steel vehicle barrier or parapet with its plinth, kN per m of each line. Common practice, no source. */
-const BARRIER_LINE_KN_M = 5;
+export const BARRIER_LINE_KN_M = 5;
 
-const carriage: ReadonlySet<StripKind> = new Set<StripKind>(['lane', 'shoulder']);
-const raised: ReadonlySet<StripKind> = new Set<StripKind>(['footway', 'verge']);
-const railed: ReadonlySet<StripKind> = new Set<StripKind>(['barrier', 'parapet']);
+export const carriage: ReadonlySet<StripKind> = new Set<StripKind>(['lane', 'shoulder']);
+export const raised: ReadonlySet<StripKind> = new Set<StripKind>(['footway', 'verge']);
+export const railed: ReadonlySet<StripKind> = new Set<StripKind>(['barrier', 'parapet']);
 
 function widthOf(strips: readonly DeckStrip[], kinds: ReadonlySet<StripKind>): number {
   return strips.reduce((sum, strip) => (kinds.has(strip.kind) ? sum + strip.widthM : sum), 0);

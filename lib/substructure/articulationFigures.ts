@@ -1,0 +1,245 @@
+import { described, type At, type Descriptor } from '../model/index.ts';
+import { deckMaterial } from './deckMaterial.ts';
+import { depthPathAt, fixedIn, unitsAt, type UnitAt } from './meetings.ts';
+import { supportName } from './supportFigures.ts';
+
+const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
+const support = (steps: string): string => `options/:option/supports/:support/${steps}`;
+const on =
+  (what: string) =>
+  (at: At): string =>
+    `${what}, ${supportName(at)}`;
+const factor = (name: string): string => `data/substructure/factors/${name}`;
+
+/** Spans on either side of a support in one unit. */
+const spansBeside = (at: At, { s, path, unit }: UnitAt): string[] =>
+  [s - 1, s]
+    .filter((i) => i >= 0 && i < at.option.designs[unit]!.task.spansM.length)
+    .map((i) => `${path}/task/spansM/${i}`);
+
+/** The units that hold this support still, and those that slide on it. */
+const holding = (at: At): UnitAt[] => unitsAt(at).filter(({ unit, s }) => fixedIn(at, unit) === s);
+
+const permanents = (at: At, { unit, path }: UnitAt, keep: (s: number) => boolean): string[] =>
+  at.option.units[unit]!.supportsM.flatMap((_, s) => (keep(s) ? [`${path}/reactions/${s}/permanentKN`] : []));
+
+/**
+ * Unbalanced friction of the sliding bearings on either side of a fixed point, from their permanent loads:
+ * adverse mu (1 + a) / 2 on the side with more, relieving mu (1 - a) / 2 on the other.
+ */
+function friction(left: readonly number[], right: readonly number[], perLine: number, mu: number): number {
+  const pressed = (all: readonly number[]): number => sum(all.map((one) => Math.max(0, one)));
+  const n = (left.length + right.length) * perLine;
+  const a = n <= 4 ? 1 : n < 10 ? (16 - n) / 12 : 0.5;
+  const more = Math.max(pressed(left), pressed(right));
+  const less = Math.min(pressed(left), pressed(right));
+  return (mu * (1 + a) * more) / 2 - (mu * (1 - a) * less) / 2;
+}
+
+/** How the deck is held at a support. */
+export const articulationFigures: readonly Descriptor[] = [
+  described({
+    path: support('articulation/fixed'),
+    label: on('holds the deck along the road'),
+    unit: '',
+    method: 'choice',
+    formula: 'support nearest the middle of the unit; of equals the lower, then the one in shallower water',
+    inputs: (at) => ({
+      all: unitsAt(at).flatMap(({ unit }) =>
+        at.option.units[unit]!.supportsM.map((_, s) => `${at.root}/units/${unit}/supportsM/${s}`),
+      ),
+    }),
+  }),
+  described({
+    path: support('articulation/bearings'),
+    label: on('bearings'),
+    unit: 'no',
+    method: 'product',
+    formula: 'units that rest here x bearings of a line',
+    inputs: (at) => ({
+      units: unitsAt(at).map(({ path, s }) => `${path}/reactions/${s}/permanentKN`),
+      line: 'data/substructure/bearings/perLine',
+    }),
+    compute: ({ units, line }) => units.length * line,
+  }),
+  described({
+    path: support('articulation/bearingMN'),
+    label: on('design load of all bearings'),
+    unit: 'MN',
+    method: 'factored sum',
+    formula: '(gamma G x permanent + gamma Q x traffic) / 1000',
+    inputs: (at) => ({
+      permanent: `${at.foot}/permanentKN`,
+      traffic: `${at.foot}/trafficKN`,
+      gammaG: factor('permanent'),
+      gammaQ: factor('traffic'),
+    }),
+    compute: (v) => Math.max(0, v.gammaG * v.permanent + v.gammaQ * v.traffic) / 1000,
+  }),
+  described({
+    path: support('articulation/alongKN'),
+    when: (at) => holding(at).length === 1 && at.appraisal.site.standard === 'lm1',
+    label: on('force along the road'),
+    unit: 'kN',
+    method: 'braking and friction',
+    formula:
+      'braking of the unit, 360 + 2.7 L up to 900 kN, + unbalanced friction: mu (1 + a) / 2 on the heavier side less mu (1 - a) / 2 on the lighter',
+    inputs: (at) => {
+      const [held] = holding(at);
+      return {
+        spans: at.option.designs[held!.unit]!.task.spansM.map((_, i) => `${held!.path}/task/spansM/${i}`),
+        base: 'data/substructure/braking/lm1/baseKN',
+        perM: 'data/substructure/braking/lm1/perMKN',
+        cap: 'data/substructure/braking/lm1/capKN',
+        left: permanents(at, held!, (s) => s < held!.s),
+        right: permanents(at, held!, (s) => s > held!.s),
+        line: 'data/substructure/bearings/perLine',
+        mu: 'data/substructure/friction/coefficient',
+      };
+    },
+    compute: (v) => Math.min(v.cap, v.base + v.perM * sum(v.spans)) + friction(v.left, v.right, v.line, v.mu),
+    sources: ['EN 1991-2 4.4.1, EN 1337-1 6.2 (from memory)'],
+  }),
+  described({
+    path: support('articulation/alongKN'),
+    when: (at) => holding(at).length === 1,
+    label: on('force along the road'),
+    unit: 'kN',
+    method: 'braking and friction',
+    formula:
+      'braking: the greater of a share of the truck and of truck with lane load, on the lanes of one direction, + unbalanced friction of the sliding bearings',
+    inputs: (at) => {
+      const [held] = holding(at);
+      const braking = (name: string): string => `data/substructure/braking/hl93/${name}`;
+      return {
+        spans: at.option.designs[held!.unit]!.task.spansM.map((_, i) => `${held!.path}/task/spansM/${i}`),
+        lanes: 'site/deck/lanes',
+        truckShare: braking('truckShare'),
+        trainShare: braking('trainShare'),
+        truck: braking('truckKN'),
+        lane: braking('laneKNm'),
+        left: permanents(at, held!, (s) => s < held!.s),
+        right: permanents(at, held!, (s) => s > held!.s),
+        line: 'data/substructure/bearings/perLine',
+        mu: 'data/substructure/friction/coefficient',
+      };
+    },
+    compute: (v) =>
+      Math.max(v.truckShare * v.truck, v.trainShare * (v.truck + v.lane * sum(v.spans))) *
+        Math.max(1, Math.ceil(v.lanes / 2)) +
+      friction(v.left, v.right, v.line, v.mu),
+    sources: ['AASHTO LRFD 3.6.4, EN 1337-1 6.2 (from memory)'],
+  }),
+  described({
+    path: support('articulation/alongKN'),
+    when: (at) => holding(at).length > 1,
+    label: on('force along the road'),
+    unit: 'kN',
+    method: 'braking and friction',
+    formula: 'braking and unbalanced friction of both units, whose fixed points meet here',
+    inputs: (at) => ({ permanent: unitsAt(at).flatMap((one) => permanents(at, one, () => true)) }),
+  }),
+  described({
+    path: support('articulation/alongKN'),
+    label: on('force along the road'),
+    unit: 'kN',
+    method: 'friction',
+    formula: 'friction x permanent load of the sliding bearings, the greater of the units that meet',
+    inputs: (at) => ({
+      permanent: unitsAt(at).flatMap((one) => permanents(at, one, (s) => s === one.s)),
+      mu: 'data/substructure/friction/coefficient',
+    }),
+    compute: ({ permanent, mu }) => Math.max(...permanent.map((one) => mu * Math.max(0, one))),
+  }),
+  described({
+    path: support('articulation/acrossKN'),
+    when: (at) => unitsAt(at).every((one) => depthPathAt(at, one) !== null),
+    label: on('wind across'),
+    unit: 'kN',
+    method: 'product',
+    formula: (at) =>
+      `pressure x (structural depth + height of traffic) x half the spans beside it${at.support.kind === 'abutment' ? ' x share of wind beside traffic' : ''}`,
+    inputs: (at) => {
+      const units = unitsAt(at);
+      return {
+        pressure: 'data/substructure/wind/pressureKNm2',
+        traffic: 'data/substructure/wind/trafficHeightM',
+        // One depth for each span beside the support, in step with them.
+        depths: units.flatMap((one) => spansBeside(at, one).map(() => depthPathAt(at, one)!)),
+        spans: units.flatMap((one) => spansBeside(at, one)),
+        share: at.support.kind === 'abutment' ? [factor('windWithTraffic')] : [],
+      };
+    },
+    compute: (v) =>
+      sum(v.spans.map((span, i) => (v.pressure * (v.depths[i]! + v.traffic) * span) / 2)) * (v.share[0] ?? 1),
+  }),
+  described({
+    path: support('articulation/acrossKN'),
+    label: on('wind across'),
+    unit: 'kN',
+    method: 'product',
+    formula: 'pressure x (depth along the haunch + height of traffic) x half the spans beside it',
+    inputs: (at) => ({
+      pressure: 'data/substructure/wind/pressureKNm2',
+      traffic: 'data/substructure/wind/trafficHeightM',
+      depth: `${at.foot}/deckDepthM`,
+      spans: unitsAt(at).flatMap((one) => spansBeside(at, one)),
+    }),
+  }),
+  described({
+    path: support('articulation/jointMovementMm'),
+    when: (at) => at.support.articulation.jointMovementMm > 0,
+    label: on('movement of the joint'),
+    unit: 'mm',
+    method: 'product',
+    formula:
+      '1000 x (expansion x range of temperature + shortening) x distance to the fixed support, of every unit that ends here',
+    inputs: (at) => {
+      const units = unitsAt(at);
+      const movement = (name: string): string[] =>
+        units.map(
+          ({ unit }) => `data/substructure/movement/${deckMaterial(at.option.designs[unit]!)}/${name}`,
+        );
+      return {
+        here: `${at.foot}/chainageM`,
+        fixed: units.map(({ unit }) => `${at.root}/units/${unit}/supportsM/${fixedIn(at, unit)}`),
+        expansion: movement('expansionPerK'),
+        range: movement('rangeK'),
+        shortening: movement('shorteningPerM'),
+      };
+    },
+    compute: (v) =>
+      sum(
+        v.fixed.map(
+          (fixed, i) => (v.expansion[i]! * v.range[i]! + v.shortening[i]!) * Math.abs(v.here - fixed) * 1000,
+        ),
+      ),
+  }),
+  described({
+    path: support('articulation/jointMovementMm'),
+    label: on('movement of the joint'),
+    unit: 'mm',
+    method: 'no joint',
+    formula: 'the deck runs through, or is fixed here',
+    inputs: (at) => ({ here: `${at.foot}/chainageM` }),
+  }),
+  described({
+    path: support('articulation/tieDownKN'),
+    label: on('design uplift'),
+    unit: 'kN',
+    method: 'factored sum',
+    formula: '-(favourable factor x permanent + gamma Q x least traffic), where that is more than 0',
+    inputs: (at) => ({
+      permanent: `${at.foot}/permanentKN`,
+      traffic: `${at.foot}/trafficLeastKN`,
+      favourable: factor('favourable'),
+      gammaG: factor('permanent'),
+      gammaQ: factor('traffic'),
+    }),
+    compute: (v) =>
+      Math.max(
+        0,
+        -((v.permanent >= 0 ? v.favourable : v.gammaG) * v.permanent + v.gammaQ * Math.min(0, v.traffic)),
+      ),
+  }),
+];

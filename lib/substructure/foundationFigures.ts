@@ -1,0 +1,245 @@
+import { described, type At, type Descriptor, type Foundation } from '../model/index.ts';
+import { settingAt } from './setting.ts';
+import { supportName } from './supportFigures.ts';
+
+export const foundation = (steps: string): string =>
+  `options/:option/supports/:support/foundations/:f/${steps}`;
+export const foundationAt = (at: At): Foundation => at.support.foundations[at.index('f')]!;
+export const footPath = (at: At): string => `${at.foot}/foundations/${at.name('f')}`;
+export const onGround =
+  (what: string) =>
+  (at: At): string =>
+    `${what}, ${supportName(at)} on ${foundationAt(at).ground.replace('-', ' ')}`;
+
+const on =
+  (what: string) =>
+  (at: At): string =>
+    `${what}, ${supportName(at)}`;
+const support = (steps: string): string => `options/:option/supports/:support/${steps}`;
+const groundFigure = (at: At, name: string): string =>
+  `data/substructure/ground/${foundationAt(at).ground}/${name}`;
+const footing = (name: string): string => `data/substructure/footing/${name}`;
+const piles = (name: string): string => `data/substructure/piles/${name}`;
+const scour = (name: string): string => `data/substructure/scour/${name}`;
+const isSpread = (at: At): boolean => foundationAt(at).kind === 'spread';
+const stratum = (at: At): string =>
+  `site/groundStretches/${at.support.stretch}/classes/${at.name('f')}/bearingLevelM`;
+
+/** What a foundation is sized for. */
+const loads = (at: At) =>
+  ({
+    permanent: `${at.foot}/permanentKN`,
+    traffic: `${at.foot}/trafficKN`,
+    along: `${at.foot}/articulation/alongKN`,
+    across: `${at.foot}/articulation/acrossKN`,
+    height: `${at.foot}/heightM`,
+    shaft: [`${at.foot}/shaft/lengthM`, `${at.foot}/shaft/widthM`],
+  }) as const;
+
+/** Waters whose flood reaches a support: those it stands in, and on a flood plain all. */
+const floods = (at: At): string[] => {
+  const { site } = at.appraisal;
+  const x = at.support.chainageM;
+  const onPlain = site.soffitLimits.some((one) => one.kind === 'flood' && x >= one.fromM && x <= one.toM);
+  return site.waters.flatMap((water, i) =>
+    water.floodLevelM !== null && (onPlain || (x >= water.fromM && x <= water.toM))
+      ? [`site/waters/${i}/floodLevelM`]
+      : [],
+  );
+};
+
+/** What the foundations of a support have in common, and what each is for its own ground. */
+export const foundationFigures: readonly Descriptor[] = [
+  described({
+    path: support('floodDepthM'),
+    label: on('depth of the flood over the ground'),
+    unit: 'm',
+    method: 'difference',
+    formula:
+      'design flood level - ground level, at least the depth of ordinary water; 0 where no flood reaches',
+    value: (at) => settingAt(at.appraisal.site, at.support.chainageM).floodDepthM,
+    inputs: (at) => ({
+      floods: floods(at),
+      ground: `${at.foot}/groundLevelM`,
+      water: `${at.foot}/waterDepthM`,
+    }),
+    compute: ({ floods: levels, ground, water }) => Math.max(water, ...levels.map((level) => level - ground)),
+  }),
+  described({
+    path: support('scourM'),
+    label: on('depth of scour'),
+    unit: 'm',
+    method: 'general and local scour',
+    formula:
+      'general scour + 1.5 b tanh(y / b), b thickness across the flow, y flood depth; no local hole at a wall',
+    inputs: (at) => ({
+      flood: `${at.foot}/floodDepthM`,
+      water: `${at.foot}/waterDepthM`,
+      river: scour('generalRiverM'),
+      plain: scour('generalPlainM'),
+      local: scour('localFactor'),
+      b: at.support.kind === 'abutment' ? [] : [`${at.foot}/shaft/lengthM`],
+    }),
+    compute: (v) => {
+      if (!(v.flood > 0)) return 0;
+      const general = v.water > 0 ? v.river : v.plain;
+      return v.b.reduce((total, b) => total + v.local * b * Math.tanh(v.flood / b), general);
+    },
+  }),
+  described({
+    path: support('pitFromM'),
+    label: on('level the pit is dug from'),
+    unit: 'm',
+    method: 'least of two levels',
+    formula: (at) =>
+      at.support.kind === 'abutment'
+        ? 'ground, or lower where the walls reach down: foot of the walls + cover over the cap'
+        : 'ground level',
+    inputs: (at) => ({
+      ground: `${at.foot}/groundLevelM`,
+      foot: at.support.kind === 'abutment' ? [`${at.foot}/footM`] : [],
+      cover: piles('capCoverM'),
+    }),
+    compute: ({ ground, foot, cover }) => Math.min(ground, ...foot.map((level) => level + cover)),
+  }),
+  described({
+    path: foundation('odds'),
+    label: onGround('odds'),
+    unit: '',
+    method: 'as given',
+    formula: 'odds that the stretch turns out to be this ground',
+    inputs: (at) => ({ odds: `site/groundStretches/${at.support.stretch}/classes/${at.name('f')}/odds` }),
+    compute: ({ odds }) => odds,
+  }),
+  ...(['lengthM', 'widthM'] as const).map((side) =>
+    described({
+      path: foundation(`footing/${side}`),
+      label: onGround(side === 'lengthM' ? 'length along the road' : 'width across the road'),
+      unit: 'm',
+      method: (at) => (isSpread(at) ? 'smallest plan that stands' : 'group with the least concrete'),
+      formula: (at) =>
+        isSpread(at)
+          ? 'V / ((B - 2 e)(W - 2 f)) within the allowable pressure, e and f within a third, sliding within base friction'
+          : 'corner pile V / n + M y / sum y^2 within shaft friction, base and concrete; cap around the rows at 3 diameters',
+      inputs: (at) =>
+        isSpread(at)
+          ? { ...loads(at), ground: [groundFigure(at, 'allowableKPa'), footing('baseFriction')] }
+          : {
+              ...loads(at),
+              ground: [groundFigure(at, 'shaftKPa'), groundFigure(at, 'baseKPa'), piles('spacing')],
+            },
+    }),
+  ),
+  described({
+    path: foundation('footing/depthM'),
+    when: isSpread,
+    label: onGround('depth of the footing'),
+    unit: 'm',
+    method: 'one-way shear',
+    formula:
+      'a q / (q + v) + cover, at least the practical depth; a overhang, q design pressure, v shear strength without links',
+    inputs: (at) => ({
+      plan: [`${footPath(at)}/footing/lengthM`, `${footPath(at)}/footing/widthM`],
+      shaft: [`${at.foot}/shaft/lengthM`, `${at.foot}/shaft/widthM`],
+      allowable: groundFigure(at, 'allowableKPa'),
+      factor: footing('designPressure'),
+      shear: footing('shearKPa'),
+      cover: footing('coverM'),
+      least: footing('leastDepthM'),
+    }),
+    compute: (v) => {
+      const overhang = Math.max(v.plan[0]! - v.shaft[0]!, v.plan[1]! - v.shaft[1]!) / 2;
+      const q = v.factor * v.allowable;
+      return Math.max(v.least, (overhang * q) / (q + v.shear) + v.cover);
+    },
+    sources: ['EN 1992-1-1 6.2.2 (from memory)'],
+  }),
+  described({
+    path: foundation('footing/depthM'),
+    label: onGround('depth of the pile cap'),
+    unit: 'm',
+    method: 'product',
+    formula: 'diameters of the pile, at least the practical depth',
+    inputs: (at) => ({
+      diameter: `${footPath(at)}/piles/diameterM`,
+      share: piles('capDepthDiameters'),
+      least: piles('leastCapDepthM'),
+    }),
+    compute: ({ diameter, share, least }) => Math.max(least, share * diameter),
+  }),
+  described({
+    path: foundation('footing/topLevelM'),
+    when: isSpread,
+    label: onGround('top of the footing'),
+    unit: 'm',
+    method: 'lowest of three levels',
+    formula: 'underside + depth; underside at the least depth, in the bearing stratum and below scour',
+    inputs: (at) => ({
+      from: `${at.foot}/pitFromM`,
+      least: groundFigure(at, 'leastDepthM'),
+      stratum: stratum(at),
+      into: groundFigure(at, 'intoStratumM'),
+      scours: groundFigure(at, 'scours'),
+      scour: `${at.foot}/scourM`,
+      below: scour('embedmentM'),
+      depth: `${footPath(at)}/footing/depthM`,
+    }),
+    compute: (v) =>
+      Math.min(
+        v.from - v.least,
+        v.stratum - v.into,
+        v.scours === 1 && v.scour > 0 ? v.from - v.scour - v.below : Infinity,
+      ) + v.depth,
+  }),
+  described({
+    path: foundation('footing/topLevelM'),
+    label: onGround('top of the pile cap'),
+    unit: 'm',
+    method: 'difference',
+    formula: 'level the pit is dug from - cover',
+    inputs: (at) => ({ from: `${at.foot}/pitFromM`, cover: piles('capCoverM') }),
+    compute: ({ from, cover }) => from - cover,
+  }),
+  ...(['count', 'diameterM'] as const).map((what) =>
+    described({
+      path: foundation(`piles/${what}`),
+      label: onGround(what === 'count' ? 'piles' : 'diameter of the piles'),
+      unit: what === 'count' ? 'no' : 'm',
+      method: 'group with the least concrete',
+      formula: 'diameters and rows tried in turn; concrete of piles and cap, and an allowance for each pile',
+      inputs: (at) => ({ ...loads(at), perPile: piles('perPileM3'), safety: piles('safety') }),
+    }),
+  ),
+  described({
+    path: foundation('piles/toeLevelM'),
+    label: onGround('level of the pile toes'),
+    unit: 'm',
+    method: 'length that the corner pile needs',
+    formula: '(load x safety - base x area) / (shaft friction x perimeter) below the bearing level and scour',
+    inputs: (at) => ({
+      ...loads(at),
+      piles: [`${footPath(at)}/piles/count`, `${footPath(at)}/piles/diameterM`],
+      ground: [
+        groundFigure(at, 'shaftKPa'),
+        groundFigure(at, 'baseKPa'),
+        groundFigure(at, 'socketDiameters'),
+      ],
+      stratum: stratum(at),
+      scour: `${at.foot}/scourM`,
+      safety: piles('safety'),
+    }),
+  }),
+  described({
+    path: foundation('piles/lengthM'),
+    label: onGround('length of the piles'),
+    unit: 'm',
+    method: 'difference',
+    formula: 'underside of the cap - toe',
+    inputs: (at) => ({
+      top: `${footPath(at)}/footing/topLevelM`,
+      depth: `${footPath(at)}/footing/depthM`,
+      toe: `${footPath(at)}/piles/toeLevelM`,
+    }),
+    compute: ({ top, depth, toe }) => top - depth - toe,
+  }),
+];

@@ -1,0 +1,265 @@
+import { described, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
+import { itemOf } from './items.ts';
+import { perM2, splitQuantities } from './quantitiesOf.ts';
+
+const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
+
+type Material = keyof ReturnType<typeof perM2>;
+const materialWords: Readonly<Record<Material, readonly [label: string, unit: string]>> = {
+  concreteM3: ['concrete', 'm3'],
+  reinforcementKg: ['reinforcing bars', 'kg'],
+  prestressKg: ['prestressing strand', 'kg'],
+  structuralSteelKg: ['structural steel', 'kg'],
+  stayCableKg: ['stay cables', 'kg'],
+  mainCableKg: ['main cables', 'kg'],
+};
+const materialOf = (at: At): Material => at.name('material') as Material;
+const words = (at: At): readonly [label: string, unit: string] => materialWords[materialOf(at)];
+
+/** Where a line of an option was measured first: a unit, a support, or the crossing itself. */
+type Origin = { readonly path: string } | { readonly crossing: string };
+
+function originOf(at: At): Origin {
+  let index = at.index('line');
+  for (const [u, design] of at.option.designs.entries()) {
+    if (index < design.lines.length) return { path: `${at.root}/designs/${u}/lines/${index}/quantity` };
+    index -= design.lines.length;
+  }
+  for (const [s, support] of at.option.supports.entries()) {
+    if (index < support.lines.length) return { path: `${at.root}/supports/${s}/lines/${index}/quantity` };
+    index -= support.lines.length;
+  }
+  return { crossing: lineOf(at).what };
+}
+
+const lineOf = (at: At): MeasuredLine => at.option.lines[at.index('line')]!;
+const label = (at: At): string => lineOf(at).what;
+const unit = (at: At): string => itemOf(lineOf(at).item).unit;
+const path = 'options/:option/lines/:line/quantity';
+
+const crossing =
+  (what: (words: string) => boolean) =>
+  (at: At): boolean => {
+    const origin = originOf(at);
+    return 'crossing' in origin && what(origin.crossing);
+  };
+const isItem =
+  (item: string) =>
+  (at: At): boolean =>
+    crossing(() => true)(at) && lineOf(at).item === item;
+
+/** Lines of one material, of the superstructure or of what carries it, as `splitQuantities` parts them. */
+function linesOf(
+  at: At,
+  part: 'superstructure' | 'supports',
+): { readonly whole: string[]; readonly likely: string[]; readonly odds: string[] } {
+  const material = materialOf(at);
+  const counts = (line: MeasuredLine): boolean =>
+    itemOf(line.item).material === material &&
+    splitQuantities([{ ...line, quantity: 1 }])[part][material] > 0;
+  const whole = at.option.lines.flatMap((line, i) =>
+    counts(line) ? [`${at.root}/lines/${i}/quantity`] : [],
+  );
+  const likely: string[] = [];
+  const odds: string[] = [];
+  for (const [s, support] of at.option.supports.entries()) {
+    for (const [f, foundation] of support.foundations.entries()) {
+      const foot = `${at.root}/supports/${s}/foundations/${f}`;
+      for (const [i, line] of foundation.lines.entries()) {
+        if (!counts(line)) continue;
+        likely.push(`${foot}/lines/${i}/quantity`);
+        odds.push(`${foot}/odds`);
+      }
+    }
+  }
+  return { whole, likely, odds };
+}
+
+/** What the possessions of a railway hang on: the method of the unit above it, its pieces, and the railway itself. */
+function possession(at: At) {
+  const name = lineOf(at).what.replace('possessions of ', '');
+  const { zones, soffitLimits } = at.appraisal.site;
+  const stretches = [
+    ...zones.flatMap((zone, i) => (zone.kind === 'railway' && zone.name === name ? [`site/zones/${i}`] : [])),
+    ...soffitLimits.flatMap((limit, i) =>
+      limit.kind === 'railway' && limit.reason === name ? [`site/soffitLimits/${i}`] : [],
+    ),
+  ];
+  const of = [...zones, ...soffitLimits].filter(
+    (one) => one.kind === 'railway' && ('name' in one ? one.name : one.reason) === name,
+  );
+  const middle = (Math.min(...of.map(({ fromM }) => fromM)) + Math.max(...of.map(({ toM }) => toM))) / 2;
+  const over = at.option.units.findIndex(({ supportsM }) => middle <= supportsM.at(-1)!);
+  const design = at.option.designs[over]!;
+  const rule = `data/programme/methods/${design.task.method}/possessions`;
+  const path = `${at.root}/designs/${over}`;
+  return {
+    base: `${rule}/base`,
+    perPiece: `${rule}/perPiece`,
+    margin: 'data/programme/railMarginM',
+    from: stretches.map((one) => `${one}/fromM`),
+    to: stretches.map((one) => `${one}/toM`),
+    piece: design.heaviestPiece === null ? [] : [`${path}/heaviestPiece/lengthM`],
+    girders: design.task.girders === undefined ? [] : [`${path}/task/girders`],
+  };
+}
+
+const approach = (end: 'start' | 'end'): Descriptor =>
+  described({
+    path,
+    when: crossing((what) => what === `${end} approach`),
+    label,
+    unit,
+    method: 'closed form',
+    formula:
+      '(W h^2 / 2 + s h^3 / 3) / g: h height of the road at the abutment, W width, s side slope, g limiting gradient',
+    inputs: (at) => ({
+      road: `site/road/${end}LevelM`,
+      ground: `${at.root}/supports/${end === 'start' ? 0 : at.option.supports.length - 1}/groundLevelM`,
+      width: 'site/deck/widthM',
+      slope: 'site/road/fillSideSlope',
+      gradient: 'site/road/maxGradient',
+    }),
+    compute: (v) => {
+      const h = Math.max(0, v.road - v.ground);
+      return ((v.width * h ** 2) / 2 + (v.slope * h ** 3) / 3) / v.gradient;
+    },
+  });
+
+/** Quantities: lines of the take-off, and what they add up to. */
+export const takeOffFigures: readonly Descriptor[] = [
+  described({
+    path: 'options/:option/designs/:unit/lines/:line/quantity',
+    label: (at) => at.design.lines[at.index('line')]!.what,
+    unit: (at) => itemOf(at.design.lines[at.index('line')]!.item).unit,
+    method: 'take-off',
+    formula: (at) => at.design.lines[at.index('line')]!.how,
+    inputs: (at) => ({
+      spans: at.design.task.spansM.map((_, i) => `${at.unit}/task/spansM/${i}`),
+      width: `${at.unit}/task/deck/widthM`,
+      depth: `${at.unit}/task/depthM`,
+    }),
+  }),
+  described({
+    path,
+    when: (at) => 'path' in originOf(at),
+    label,
+    unit,
+    method: 'as measured',
+    formula: (at) => lineOf(at).how,
+    inputs: (at) => {
+      const origin = originOf(at);
+      return { measured: 'path' in origin ? origin.path : '' };
+    },
+    compute: ({ measured }) => measured,
+  }),
+  described({
+    path,
+    when: isItem('surfacing'),
+    label,
+    unit,
+    method: 'product',
+    formula: 'length x deck width',
+    inputs: () => ({ length: 'site/lengthM', width: 'site/deck/widthM' }),
+    compute: ({ length, width }) => length * width,
+  }),
+  described({
+    path,
+    when: isItem('parapet'),
+    label,
+    unit,
+    method: 'product',
+    formula: 'two edges x length',
+    inputs: () => ({ length: 'site/lengthM' }),
+    compute: ({ length }) => 2 * length,
+  }),
+  approach('start'),
+  approach('end'),
+  described({
+    path,
+    when: isItem('fill'),
+    label,
+    unit,
+    method: 'as sized',
+    formula: 'fill added by lifting the road',
+    inputs: (at) => ({ added: `${at.root}/profile/addedFillM3` }),
+    compute: ({ added }) => added,
+  }),
+  described({
+    path,
+    when: isItem('rail-possession'),
+    label,
+    unit,
+    method: 'simple rule',
+    formula:
+      'rounded up: possessions of the method + share x girder lines x pieces of each over the track and its margins',
+    inputs: possession,
+    compute: (v) => {
+      const reach = Math.max(...v.to) - Math.min(...v.from) + 2 * v.margin;
+      const pieces = v.piece.reduce(
+        (all, length) => all + (v.girders[0] ?? 2) * Math.ceil(reach / length),
+        0,
+      );
+      return Math.ceil(v.base + v.perPiece * pieces);
+    },
+  }),
+  described({
+    path,
+    when: isItem('method-setup'),
+    label,
+    unit,
+    method: 'figure of practice',
+    formula: 'set-ups of the method, in set-ups of a crane job',
+    inputs: (at) => ({
+      setups: `data/programme/methods/${lineOf(at).what.replace('set-up for ', '')}/setups`,
+    }),
+    compute: ({ setups }) => setups,
+  }),
+  described({
+    path,
+    when: isItem('site-setup'),
+    label,
+    unit,
+    method: 'count',
+    formula: 'once',
+    value: (at) => lineOf(at).quantity,
+  }),
+  described({
+    path,
+    when: isItem('site-month'),
+    label,
+    unit,
+    method: 'as planned',
+    formula: 'likely months on site',
+    inputs: (at) => ({ months: `${at.root}/months/p50` }),
+    compute: ({ months }) => months,
+  }),
+  described({
+    path: 'options/:option/quantities/:material',
+    label: (at) => `${words(at)[0]} of the superstructure`,
+    unit: (at) => words(at)[1],
+    method: 'sum',
+    formula: 'lines of this material but those of pylons, piers, abutments, foundations and river works',
+    inputs: (at) => ({ lines: linesOf(at, 'superstructure').whole }),
+    compute: ({ lines }) => sum(lines),
+  }),
+  described({
+    path: 'options/:option/supportQuantities/:material',
+    label: (at) => `${words(at)[0]} of supports and foundations`,
+    unit: (at) => words(at)[1],
+    method: 'sum weighed by odds',
+    formula:
+      'lines of this material in pylons, piers, abutments + lines of each foundation x odds of its ground',
+    inputs: (at) => linesOf(at, 'supports'),
+    compute: ({ whole, likely, odds }) => sum(whole) + sum(likely.map((quantity, i) => quantity * odds[i]!)),
+  }),
+  described({
+    path: 'options/:option/perM2/:material',
+    label: (at) => `${words(at)[0]} per m2 of deck`,
+    unit: (at) => `${words(at)[1]}/m2`,
+    method: 'ratio',
+    formula: 'quantity of the superstructure / deck area',
+    inputs: (at) => ({ quantity: `${at.root}/quantities/${materialOf(at)}`, area: `${at.root}/deckAreaM2` }),
+    compute: ({ quantity, area }) => quantity / area,
+  }),
+];
