@@ -10,6 +10,8 @@ import type { Path } from './place.ts';
 import { getAt, hasAt, isWithin, putAt } from './place.ts';
 import type { Way } from './refusal.ts';
 import type { StudyStore } from './store.ts';
+import type { WordsSpec } from './wordsInput.ts';
+import { wordsInput } from './wordsInput.ts';
 
 type Bound = 'value' | 'input' | 'change' | 'key' | 'origin';
 
@@ -27,6 +29,8 @@ export interface Fields {
     path: Path,
     spec: Omit<ChoiceSpec<T>, Bound> & FieldOptions,
   ) => HTMLElement;
+  /** Words of the study at a path, in step with it both ways. */
+  readonly words: (path: Path, spec: Omit<WordsSpec, Bound> & FieldOptions) => HTMLElement;
   /** Those problems that no field here says: to be said elsewhere on the page. */
   readonly unsaid: (problems: readonly Problem[]) => readonly Problem[];
   /** Takes all fields out of step. */
@@ -111,6 +115,24 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
         spec.choices.find((one) => one.value === value)?.words ?? value;
       tie(path, { ...choice, words }, isPreset === undefined ? {} : { isPreset });
       return choice.element;
+    },
+    words(path, { isPreset, ...spec }) {
+      const edit = put(path, spec.label);
+      const words = wordsInput({
+        ...spec,
+        value: start(path) as string,
+        key: path.join('.'),
+        change(value) {
+          edit(value);
+          store.endStep();
+        },
+      });
+      tie(
+        path,
+        { ...words, words: (value: string) => `'${value}'` },
+        isPreset === undefined ? {} : { isPreset },
+      );
+      return words.element;
     },
     unsaid: (problems) => problems.filter((problem) => !tied.some((path) => isWithin(problem.path, path))),
     end() {

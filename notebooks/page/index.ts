@@ -14,6 +14,8 @@ export { figureInput, type FigureInput, type FigureSpec, type Origin } from './f
 export type { Figure, FigureRules, Limit } from './figureText.ts';
 export type { ScaleMark } from './figureScale.ts';
 export { choiceInput, type Choice, type ChoiceInput, type ChoiceSpec } from './choiceInput.ts';
+export { wordsInput, type WordsInput, type WordsSpec } from './wordsInput.ts';
+export { standing, type StandingSpec } from './standing.ts';
 export { draggable, type Drag, type DragAt } from './dragging.ts';
 export { waysOn, type Way } from './refusal.ts';
 export { getAt, isWithin, putAt, type Path } from './place.ts';

@@ -261,6 +261,46 @@ describe('a field of the study', () => {
   });
 });
 
+describe('words in place', () => {
+  it('are kept with Enter, given up with Escape, refused when too long, and undone', async () => {
+    const title = page.getByRole('textbox', { name: 'title' });
+    await title.click();
+    await key('Control+End');
+    await page.keyboard.type(' by the old mill');
+    await key('Escape');
+    expect(await title.textContent()).toBe('River Wend crossing at Low Ferry');
+    await key('Control+End');
+    await page.keyboard.type(', second study');
+    await key('Enter');
+    expect(await trial(({ draft }) => draft().title)).toBe('River Wend crossing at Low Ferry, second study');
+    await page.keyboard.type(' of the crossing of the river and the railway');
+    await key('Enter');
+    expect(await texts('[id="1+010"] .refusal .why')).toEqual([
+      expect.stringContaining('at most 60 characters'),
+    ]);
+    await trial(({ undo }) => undo());
+    await frame();
+    expect(await title.textContent()).toBe('River Wend crossing at Low Ferry');
+  });
+
+  it('sentences follow how many there are of a kind, and their fields stay in step', async () => {
+    const level = (number: number): Locator => field(`level ${number}`);
+    expect(await page.getByRole('textbox', { name: /^water/u }).count()).toBe(1);
+    await trial(({ addWater }) => addWater());
+    expect(await page.getByRole('textbox', { name: 'water 2' }).textContent()).toBe('Mill stream');
+    await level(2).focus();
+    await page.keyboard.type('6,5');
+    await key('Enter');
+    expect(await trial(({ draft }) => draft().brief.waters.map(({ levelM }) => levelM))).toEqual([7.2, 6.5]);
+    await trial(({ undo }) => undo());
+    expect(await level(2).textContent()).toBe('7.20');
+    await trial(({ undo }) => undo());
+    await page.getByRole('link', { name: '1+010' }).focus();
+    await frame();
+    expect(await page.getByRole('textbox', { name: /^water/u }).count()).toBe(1);
+  });
+});
+
 describe('the device', () => {
   it('keeps a study across openings, and a second page that saved meanwhile is not written over', async () => {
     expect(await trial(({ device }) => device())).toEqual({

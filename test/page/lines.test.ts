@@ -50,6 +50,16 @@ describe('stationLine', () => {
     expect(curves(piece)).toHaveLength(3);
   });
 
+  it('stationLine(view) tells spans that leave over the top from those that leave below', () => {
+    const up = { at: '2+010', uses: ['1+010'], usedBy: ['1+020', '2+030'] };
+    const piece = stationLine({ ...input, joined: up, view: { top: 600, bottom: 1000 } });
+    expect(texts(piece)).toEqual(['from 1+010', 'to 1+020', 'to 2+030']);
+    const heights = all(piece)
+      .filter(({ tag }) => tag === 'text')
+      .map(({ attrs }) => Number(attrs['y']));
+    expect(heights).toEqual([614, 627, 992]);
+  });
+
   it('stationLine(lineX) of a narrow band sets those words on two lines', () => {
     const piece = stationLine({ ...input, joined, view: { top: 0, bottom: 1000 }, lineX: 60 });
     expect(texts(piece)).toEqual(['to 2+020', '1 more']);

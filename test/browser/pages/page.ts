@@ -12,6 +12,7 @@ import {
   figureInput,
   putAt,
   sheet,
+  standing,
   studyShelf,
   studyStore,
 } from '../../../notebooks/page/index.ts';
@@ -29,6 +30,23 @@ const store = studyStore(g, read.value, (study: Study) => {
 });
 const { brief } = store.slices;
 const fields = fieldsOf(g, store, sentence);
+
+/** How many waters there are decides how many sentences there are. */
+const waters = standing(g, store, {
+  say: sentence,
+  shape: (draft) => draft.brief.waters.length,
+  build: (draft, own) =>
+    draft.brief.waters.map((_, i) =>
+      h(
+        'p',
+        {},
+        own.words(['brief', 'waters', i, 'name'], { label: `water ${i + 1}` }),
+        ' stands at ',
+        own.figure(['brief', 'waters', i, 'levelM'], { label: `level ${i + 1}`, unit: 'm', places: 2 }),
+        ' m.',
+      ),
+    ),
+});
 
 const length = g.cell('length', { brief }, ({ brief: { crossing } }) => crossing.endM - crossing.startM);
 const depth = g.input('depth', 2.3);
@@ -145,6 +163,8 @@ page.mount(document.body, {
             ' mm thick; whatever else the site asks for stands further down and is drawn on the crossing.',
           ),
           notes: [
+            h('p', {}, 'The crossing is called ', fields.words(['title'], { label: 'title', most: 60 }), '.'),
+            waters.element,
             h('p', {}, 'Plain underline: typed here. Dotted: preset, to be confirmed. Dashed: unknown.'),
             h('p', { class: 'caution' }, h('b', {}, 'Caution.'), ' 5.90 m is a preset.'),
             h('p', { class: 'source' }, 'Flood: hydraulic note, table 3, read.'),
@@ -275,6 +295,12 @@ const trial = {
   counts,
   told,
   setDepth: (metres: number): void => g.set(depth, metres),
+  addWater: (): void =>
+    store.edit((study) => {
+      const [first] = study.brief.waters;
+      return putAt(study, ['brief', 'waters'], [...study.brief.waters, { ...first!, name: 'Mill stream' }]);
+    }),
+  undo: store.undo,
   setEnd: (metres: number): void => setField(['brief', 'crossing', 'endM'], metres),
   /** Ends the slow run under way well, once it has begun. */
   answer: async (): Promise<void> => {
