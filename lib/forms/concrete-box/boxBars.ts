@@ -59,7 +59,7 @@ export function boxBars(model: BoxModel, box: SizedBox): BoxBars {
 }
 
 /** Anchorages of the draped tendons: two for every length of tendon, two spans long or the whole deck. */
-export function anchorageCount(model: BoxModel, box: SizedBox): number {
+function anchorageCount(model: BoxModel, box: SizedBox): number {
   const lengths = Math.max(1, Math.ceil(model.task.spansM.length / 2));
   return 2 * lengths * box.tendons.group.tendonsPerWeb * model.layout.webs;
 }

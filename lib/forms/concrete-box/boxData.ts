@@ -40,6 +40,14 @@ const schema = z.object({
   strandSlack: cited,
   prestressSpread: citedByStandard,
   profile: z.object({ inflection: number, lowInEndSpan: number, source }),
+  staggering: z.object({
+    endOverInner: number,
+    leastShare: number,
+    runsOnOver: number,
+    endsByOver: number,
+    alikeFrom: number,
+    source,
+  }),
   serviceTensionMPa: citedByStandard,
   decompressedAroundDuctM: cited,
   compression: z.object({

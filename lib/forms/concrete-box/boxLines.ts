@@ -42,9 +42,9 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
     measured(
       'deck',
       'prestress',
-      strandKg(model, draped),
+      strandKg(model, draped * tendons.meanShare),
       'draped tendons',
-      `${layout.webs} webs, ${group.tendonsPerWeb} tendons of ${group.strandsPerTendon.toFixed(1)} strands each`,
+      `${layout.webs} webs, ${group.tendonsPerWeb} tendons of ${group.strandsPerTendon.toFixed(1)} strands each${tendons.meanShare < 1 ? `, ${(100 * tendons.meanShare).toFixed(0)} % of them along the mean of the deck` : ''}`,
     ),
   ];
   if (tendons.straightStrands > 0)

@@ -5,6 +5,7 @@ import { supportPositions } from '../common/supports.ts';
 import { boxData } from './boxData.ts';
 import { boxLayout, type BoxLayout } from './boxLayout.ts';
 import { boxTraffic, type BoxTraffic } from './boxTraffic.ts';
+import { sharePowers } from './tendonShare.ts';
 import { tendonShapes, type TendonShapes } from './tendonShape.ts';
 
 /** Everything about a box that does not change while its thicknesses and tendons are sought. */
@@ -25,7 +26,8 @@ export interface BoxModel {
   readonly traffic: BoxTraffic;
   /** Parasitic moment of unit curvature that arches the deck upwards, on stiffness 1. */
   readonly archedKNm: Float64Array;
-  readonly tendonShapes: TendonShapes;
+  /** Ways to share the strands out among the spans. */
+  readonly tendonShapes: readonly TendonShapes[];
   /** Area of one strand, m2. */
   readonly strandM2: number;
   readonly leastWebM: number;
@@ -57,7 +59,7 @@ export function boxModel(task: UnitTask): BoxModel {
     superimposed: uniform(beam, task.deck.superimposedKNm),
     traffic: boxTraffic(task, beam),
     archedKNm: imposedCurvature(beam, new Float64Array(beam.xM.length).fill(-1)).momentKNm,
-    tendonShapes: tendonShapes(spansM, beam),
+    tendonShapes: sharePowers(spansM).map((power) => tendonShapes(spansM, beam, power)),
     strandM2: boxData.strandAreaMm2[standardId] * 1e-6,
     leastWebM: launched ? boxData.webLeastLaunchedM[standardId] : boxData.webLeastM[standardId],
     leastBottomM: roundUp(

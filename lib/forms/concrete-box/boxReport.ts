@@ -70,6 +70,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     tendonCount: tendons.group.tendonsPerWeb * layout.webs,
     strandsPerTendon: tendons.group.strandsPerTendon,
     strandCount: strands,
+    meanStrandShare: tendons.meanShare,
     tendonForceKN: tendons.forceKN,
     launchingForceKN: tendons.straightInitialKN,
     jackingStressMPa: tendons.stress.jackMPa,
@@ -80,7 +81,9 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     shearDesignKN: box.shear.mostKN,
     concreteM3M2: concreteM3 / areaM2,
     barsKgM3: barsKg / concreteM3,
-    strandKgM2: strandKg(model, strands) / areaM2,
+    strandKgM2:
+      strandKg(model, tendons.strandsPerWeb * layout.webs * tendons.meanShare + tendons.straightStrands) /
+      areaM2,
   };
   for (let span = 0; span < task.spansM.length; span++) {
     const middle = (beam.supportAt[span]! + beam.supportAt[span + 1]!) >> 1;

@@ -9,5 +9,5 @@ export function boxService(
 ): { readonly needKN: number; readonly forceKN: number } {
   const { sections, own, tendons } = box;
   const demand = serviceNeed(model, sections, own, tendons.group, tendons.straightKN);
-  return { needKN: demand(tendons.eccentricityM, tendons.parasiticM), forceKN: tendons.forceKN };
+  return { needKN: demand(tendons), forceKN: tendons.forceKN };
 }

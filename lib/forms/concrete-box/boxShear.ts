@@ -38,7 +38,6 @@ export function boxShear(
   const webShare = trafficShare(model, perM);
   const torque = curveTorque(model, own);
   const lean = Math.hypot(1, layout.slope);
-  const strandM2 = (tendons.strandsPerWeb * layout.webs + tendons.straightStrands / 2) * model.strandM2;
   const across = webBending(model, sections);
   const { down, up } = ultimateMoments(model, own);
   const momentAt = (i: number): number => Math.max(Math.abs(down[i]!), Math.abs(up[i]!));
@@ -46,11 +45,12 @@ export function boxShear(
   let mostKN = 0;
   for (let e = 0; e < beam.xM.length - 1; e++) {
     const length = beam.xM[e + 1]! - beam.xM[e]!;
+    const share = (tendons.share[e]! + tendons.share[e + 1]!) / 2;
     const tendon =
       (tendons.forceKN *
         (tendons.parasiticM[e + 1]! -
           tendons.parasiticM[e]! -
-          (tendons.depthM[e + 1]! - tendons.depthM[e]!))) /
+          share * (tendons.depthM[e + 1]! - tendons.depthM[e]!))) /
       length;
     let shearKN = 0;
     let at = e;
@@ -75,9 +75,9 @@ export function boxShear(
     demands.push({
       shearKN: lean * shearKN,
       momentKNm: moment / layout.webs,
-      strandM2: strandM2 / layout.webs,
+      strandM2: (share * tendons.strandsPerWeb + tendons.straightStrands / 2 / layout.webs) * model.strandM2,
       barM2: faceBarsM2(sections.span.bottomWidthM) / layout.webs,
-      axialMPa: (tendons.forceKN + tendons.straightKN) / sections.areaM2[at]! / 1e3,
+      axialMPa: (share * tendons.forceKN + tendons.straightKN) / sections.areaM2[at]! / 1e3,
       effectiveM: task.depthM - boxData.ductCoverM.value,
       acrossKNm: across,
     });

@@ -50,13 +50,14 @@ export function boxCompressions(
     const area = sections.areaM2[i]!;
     const lowW = sections.inertiaM4[i]! / sections.lowM[i]!;
     const topW = sections.inertiaM4[i]! / sections.topM[i]!;
+    const share = tendons.share[i]!;
     // What is left of a unit draped force as a moment about the centroid, sagging positive.
-    const arm = tendons.parasiticM[i]! - tendons.eccentricityM[i]!;
+    const arm = tendons.parasiticM[i]! - share * tendons.eccentricityM[i]!;
     const g = own.effects.momentKNm[i]!;
     const lasting = g + model.superimposed.momentKNm[i]! + tendons.forceKN * arm;
-    const axial = (tendons.forceKN + tendons.straightKN) / area;
+    const axial = (share * tendons.forceKN + tendons.straightKN) / area;
     const fresh = g + tendons.initialKN * arm;
-    const freshAxial = (tendons.initialKN + tendons.straightInitialKN) / area;
+    const freshAxial = (share * tendons.initialKN + tendons.straightInitialKN) / area;
     const soffit = model.pierShare[i]! > 0 ? 'pierSoffit' : 'spanSoffit';
     note(soffit, axial - lasting / lowW, limits.permanent);
     note(soffit, axial - (lasting + most.momentMinKNm[i]!) / lowW, limits.total);

@@ -1,4 +1,5 @@
 import {
+  loadStandard,
   serviceTraffic,
   trafficEnvelope,
   trafficOnDeck,
@@ -14,7 +15,7 @@ export interface BoxTraffic {
   /** Characteristic. */
   readonly most: TrafficEnvelope;
   /** In the combination that decides the prestress. */
-  readonly service: TrafficEnvelope;
+  readonly service: Pick<TrafficEnvelope, 'momentMaxKNm' | 'momentMinKNm'>;
 }
 
 const kept = new Map<string, BoxTraffic>();
@@ -28,12 +29,20 @@ export function boxTraffic(task: UnitTask, beam: LineBeam): BoxTraffic {
   const known = kept.get(key);
   if (known) return known;
   const load = trafficOnDeck(task.standard, task.deck);
-  const made = {
-    load,
-    most: trafficEnvelope(beam, load, { deflection: false }),
-    service: trafficEnvelope(beam, serviceTraffic(load), { deflection: false }),
-  };
+  const most = trafficEnvelope(beam, load, { deflection: false });
+  const made = { load, most, service: serviceMoments(beam, load, most) };
   if (kept.size >= 32) for (const [oldest] of [...kept].slice(0, 16)) kept.delete(oldest);
   kept.set(key, made);
   return made;
+}
+
+/** Where all loads are taken at the same share, as in Service III, the characteristic moments are scaled. */
+function serviceMoments(beam: LineBeam, load: TrafficLoad, most: TrafficEnvelope): BoxTraffic['service'] {
+  const { vehicle, uniform, footway } = loadStandard(load.standard).factors.sls;
+  if (vehicle !== uniform || vehicle !== footway)
+    return trafficEnvelope(beam, serviceTraffic(load), { deflection: false });
+  return {
+    momentMaxKNm: most.momentMaxKNm.map((moment) => vehicle * moment),
+    momentMinKNm: most.momentMinKNm.map((moment) => vehicle * moment),
+  };
 }

@@ -14,9 +14,10 @@ import { ultimateNeed } from './ultimateNeed.ts';
 /** Tendons of the whole deck. */
 export interface Tendons {
   readonly group: TendonGroup;
+  /** In the heaviest span. */
   readonly strandsPerWeb: number;
   readonly stress: TendonStress;
-  /** Draped force after all losses, and before the lasting ones, kN. */
+  /** Draped force of the heaviest span after all losses, and before the lasting ones, kN. */
   readonly forceKN: number;
   readonly initialKN: number;
   /** Centred strands of a launched deck, and their force after all losses and before, kN. */
@@ -32,13 +33,17 @@ export interface Tendons {
   readonly eccentricityM: Float64Array;
   /** Parasitic moment of unit draped force, m, sagging positive. */
   readonly parasiticM: Float64Array;
+  /** How the strands are shared out among the spans: which of the ways of the model, shares at the stations, and their mean. */
+  readonly way: number;
+  readonly share: Float64Array;
+  readonly meanShare: number;
   /** Ultimate bending: worst use in sagging and in hogging. */
   readonly sag: BendingUse;
   readonly hog: BendingUse;
 }
 
 /** What the search starts from: the tendons of the pass before. */
-export type TendonStart = Pick<Tendons, 'drape' | 'strandsPerWeb' | 'forceKN' | 'steadiedKN'>;
+export type TendonStart = Pick<Tendons, 'drape' | 'strandsPerWeb' | 'forceKN' | 'steadiedKN' | 'way'>;
 
 /** Strands of a web by which the first pass judges the room of the tendons. */
 const firstGuess = 48;
@@ -70,35 +75,32 @@ export function findTendons(
   const stress = tendonStress(model, sagM, Math.min(axialMPa, model.concrete.fckMPa / 2));
   const perStrandKN = stress.lastingMPa * model.strandM2 * 1e3;
 
-  const line = tendonLine(model, sections, group);
   const service = serviceNeed(model, sections, own, group, straightKN);
   // A deeper compression zone asks for more force and that deepens it again: half the way is steady.
   const steadiedKN = before ? (before.forceKN + (before.steadiedKN || before.forceKN)) / 2 : 0;
-  const ultimate = ultimateNeed(
-    model,
-    sections,
-    own,
-    stress.lastingMPa,
-    straightStrands * model.strandM2,
-    steadiedKN,
-  );
-  const found = leastForce(
-    (drape) => {
-      const { depthM, eccentricityM, parasiticM } = line(drape);
-      return Math.max(service(eccentricityM, parasiticM), ultimate(depthM, parasiticM));
-    },
-    spansM.length,
-    before?.drape ?? null,
-  );
-  const { depthM, eccentricityM, parasiticM } = line(found.drape);
+  const straightM2 = straightStrands * model.strandM2;
+  const tried = model.tendonShapes.flatMap((shapes, way) => {
+    if (before && way !== before.way) return [];
+    const line = tendonLine(model, sections, group, shapes);
+    const ultimate = ultimateNeed(model, sections, own, stress.lastingMPa, straightM2, steadiedKN, shapes);
+    const need = (drape: Drape): number => {
+      const at = line(drape);
+      return Math.max(service(at), ultimate(at));
+    };
+    const { drape, forceKN } = leastForce(need, spansM.length, before?.drape ?? null);
+    return [{ way, drape, forceKN, meanShare: shapes.meanShare, line }];
+  });
+  const found = tried.reduce((a, b) => (b.forceKN * b.meanShare < a.forceKN * a.meanShare ? b : a));
+  const { depthM, eccentricityM, parasiticM, share } = found.line(found.drape);
 
   const bend = (strands: number): [BendingUse, BendingUse] =>
     ultimateBending(model, sections, own, {
       draped: strands * webs * model.strandM2,
       forceKN: strands * webs * perStrandKN,
-      straight: straightStrands * model.strandM2,
+      straight: straightM2,
       depthM,
       parasiticM,
+      share,
     });
   const wanted = Math.ceil(found.forceKN / perStrandKN / webs - 1e-6);
   let strandsPerWeb = Math.min(most, Math.max(boxData.tendons.sizes[0]!.strands, wanted));
@@ -127,6 +129,9 @@ export function findTendons(
     depthM,
     eccentricityM,
     parasiticM,
+    way: found.way,
+    share,
+    meanShare: found.meanShare,
     sag,
     hog,
   };

@@ -3,15 +3,16 @@ import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import type { TendonGroup } from './tendonGroup.ts';
+import type { TendonLine } from './tendonLine.ts';
 
-/** Draped force after all losses that service asks for along a given line of the tendons, kN; Infinity where none will do. */
+/** Draped force of the heaviest span after all losses that service asks for along a given line of the tendons, kN; Infinity where none will do. */
 export function serviceNeed(
   model: BoxModel,
   sections: SectionsAlong,
   own: OwnWeight,
   group: TendonGroup,
   straightKN: number,
-): (eccentricityM: Float64Array, parasiticM: Float64Array) => number {
+): (line: TendonLine) => number {
   const { service } = model.traffic;
   const { gradient } = boxData;
   const spread = boxData.prestressSpread[model.standardId];
@@ -37,7 +38,7 @@ export function serviceNeed(
       service.momentMinKNm[i]! +
       Math.min(arched * gradient.topWarmerK, -arched * gradient.topCoolerK);
   }
-  return (eccentricityM, parasiticM) => {
+  return ({ eccentricityM, parasiticM, share }) => {
     let most = 0;
     for (let i = 0; i < n; i++) {
       const area = sections.areaM2[i]!;
@@ -46,9 +47,10 @@ export function serviceNeed(
       const straight = (spread * straightKN) / area + tension;
       const down = Math.min(sections.lowM[i]!, e + around) / inertia;
       const up = Math.min(sections.topM[i]!, around - e) / inertia;
-      const bend = e - parasiticM[i]!;
-      const lowNeed = (sagging[i]! * down - straight) / (spread * (1 / area + bend * down));
-      const highNeed = (-hogging[i]! * up - straight) / (spread * (1 / area - bend * up));
+      const bend = share[i]! * e - parasiticM[i]!;
+      const axial = share[i]! / area;
+      const lowNeed = (sagging[i]! * down - straight) / (spread * (axial + bend * down));
+      const highNeed = (-hogging[i]! * up - straight) / (spread * (axial - bend * up));
       most = Math.max(
         most,
         forceFor(lowNeed, sagging[i]! * down > straight),

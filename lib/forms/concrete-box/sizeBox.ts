@@ -76,7 +76,7 @@ function workOut(model: BoxModel, thicknesses: Thicknesses, before: Tendons | nu
 }
 
 /** Web thickness in the middle of an element, m. */
-export function elementWebM(sections: SectionsAlong, element: number): number {
+function elementWebM(sections: SectionsAlong, element: number): number {
   return (sections.webM[element]! + sections.webM[element + 1]!) / 2;
 }
 

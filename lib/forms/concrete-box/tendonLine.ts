@@ -3,6 +3,7 @@ import type { BoxModel } from './boxModel.ts';
 import type { Drape } from './leastForce.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import type { TendonGroup } from './tendonGroup.ts';
+import type { TendonShapes } from './tendonShape.ts';
 
 /** Draped tendons along the deck, at the stations. */
 export interface TendonLine {
@@ -12,6 +13,8 @@ export interface TendonLine {
   readonly eccentricityM: Float64Array;
   /** Parasitic moment of unit force, m, sagging positive. */
   readonly parasiticM: Float64Array;
+  /** Strands as a share of those in the heaviest span. */
+  readonly share: Float64Array;
 }
 
 /**
@@ -22,8 +25,8 @@ export function tendonLine(
   model: BoxModel,
   sections: SectionsAlong,
   group: TendonGroup,
+  { shapes, parasitic, share }: TendonShapes,
 ): (drape: Drape) => TendonLine {
-  const { shapes, parasitic } = model.tendonShapes;
   const { topM, lowM } = sections.span;
   const low = Math.max(0, lowM - group.fromFaceM);
   const high = -Math.max(0, topM - group.fromFaceM);
@@ -31,7 +34,7 @@ export function tendonLine(
   const shift = sections.topM.map((top) => topM - top);
   const shiftParasitic = imposedCurvature(
     model.beam,
-    shift.map((value) => -value),
+    shift.map((value, i) => -share[i]! * value),
   ).momentKNm;
   const n = shift.length;
   const depthM = new Float64Array(n);
@@ -47,6 +50,6 @@ export function tendonLine(
       eccentricityM[i] = e + shift[i]!;
       parasiticM[i] = a * parasitic[0][i]! + b * parasitic[1][i]! + c * parasitic[2][i]! + shiftParasitic[i]!;
     }
-    return { depthM, eccentricityM, parasiticM };
+    return { depthM, eccentricityM, parasiticM, share };
   };
 }

@@ -1,5 +1,6 @@
 import { imposedCurvature, type LineBeam } from '../../mechanics/index.ts';
 import { boxData } from './boxData.ts';
+import { tendonShare } from './tendonShare.ts';
 
 /**
  * Draped tendons as a sum of three shapes, each 1 where its eccentricity is named: low points of end spans, low points
@@ -9,13 +10,16 @@ export interface TendonShapes {
   readonly shapes: readonly [endLow: Float64Array, innerLow: Float64Array, pier: Float64Array];
   /** Parasitic moment of unit force on each shape of unit eccentricity (downward positive), m, sagging positive. */
   readonly parasitic: readonly [Float64Array, Float64Array, Float64Array];
+  /** Strands as a share of those in the heaviest span, at the stations, and their mean over the length. */
+  readonly share: Float64Array;
+  readonly meanShare: number;
 }
 
 /**
  * Parabolas with a reverse curve over the piers. Shorter spans are draped less, with the square of the span, as their
- * loads ask for. `beam` has constant stiffness 1.
+ * loads ask for. `beam` has constant stiffness 1; `power` of the span by which strands are shared out, see `tendonShare`.
  */
-export function tendonShapes(spansM: readonly number[], beam: LineBeam): TendonShapes {
+export function tendonShapes(spansM: readonly number[], beam: LineBeam, power = 0): TendonShapes {
   const n = beam.xM.length;
   const shapes = [new Float64Array(n), new Float64Array(n), new Float64Array(n)] as const;
   const last = spansM.length - 1;
@@ -40,12 +44,20 @@ export function tendonShapes(spansM: readonly number[], beam: LineBeam): TendonS
       if (inner) shapes[2][i] = support;
     }
   });
+  const share = tendonShare(spansM, beam, power);
+  let total = 0;
+  for (let i = 1; i < n; i++) total += ((share[i - 1]! + share[i]!) / 2) * (beam.xM[i]! - beam.xM[i - 1]!);
   const curvature = new Float64Array(n);
   const parasitic = shapes.map((shape) => {
-    for (let i = 0; i < n; i++) curvature[i] = -shape[i]!;
+    for (let i = 0; i < n; i++) curvature[i] = -share[i]! * shape[i]!;
     return imposedCurvature(beam, curvature).momentKNm;
   });
-  return { shapes, parasitic: [parasitic[0]!, parasitic[1]!, parasitic[2]!] };
+  return {
+    shapes,
+    parasitic: [parasitic[0]!, parasitic[1]!, parasitic[2]!],
+    share,
+    meanShare: total / beam.lengthM,
+  };
 }
 
 /** Where the low point lies, share of the span from its left support. */

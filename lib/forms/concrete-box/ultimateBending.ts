@@ -13,13 +13,14 @@ export interface BendingUse {
   readonly station: number;
 }
 
-/** Tendons as ultimate bending sees them: areas m2, draped force kN, level and parasitic moment of unit force along the deck. */
+/** Tendons as ultimate bending sees them: areas m2 and draped force kN of the heaviest span; level, parasitic moment of unit force and share of the strands along the deck. */
 export interface UltimateSteel {
   readonly draped: number;
   readonly forceKN: number;
   readonly straight: number;
   readonly depthM: Float64Array;
   readonly parasiticM: Float64Array;
+  readonly share: Float64Array;
 }
 
 /** Ultimate bending at every station, parasitic moment of the tendons included. */
@@ -42,7 +43,8 @@ export function ultimateBending(
     const hogging = up[i]! - parasitic;
     const websM = layout.webs * sections.webM[i]!;
     const slabs = task.depthM - boxData.ductCoverM.value;
-    const tension = (fromFaceM: number, barM2: number) => mixed(steel, fromFaceM, slabs, barM2, task.depthM);
+    const tension = (fromFaceM: number, barM2: number) =>
+      mixed(steel.draped * steel.share[i]!, steel.straight, fromFaceM, slabs, barM2, task.depthM);
     if (sagging > 0) {
       const capacityKNm = bendingCapacity(model, tension(steel.depthM[i]!, bars[0]), { ...top, websM });
       sag = worse(sag, sagging, capacityKNm, i);
@@ -66,17 +68,18 @@ function worse(known: BendingUse, demandKNm: number, capacityKNm: number, statio
 
 /** Draped strands at their level, half of the centred ones near the tension face, bars in that face. */
 function mixed(
-  steel: UltimateSteel,
+  draped: number,
+  straight: number,
   drapedDepthM: number,
   farM: number,
   barM2: number,
   depthM: number,
 ): TensionSteel {
-  const far = steel.straight / 2;
-  const strandM2 = steel.draped + far;
+  const far = straight / 2;
+  const strandM2 = draped + far;
   return {
     strandM2,
-    strandDepthM: strandM2 > 0 ? (steel.draped * drapedDepthM + far * farM) / strandM2 : depthM,
+    strandDepthM: strandM2 > 0 ? (draped * drapedDepthM + far * farM) / strandM2 : depthM,
     barM2,
     barDepthM: depthM - boxData.ductCoverM.value / 2,
   };

@@ -4,10 +4,12 @@ import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
+import type { TendonLine } from './tendonLine.ts';
+import type { TendonShapes } from './tendonShape.ts';
 import { ultimateMoments } from './ultimateMoments.ts';
 
 /**
- * Draped force after all losses that ultimate bending asks for along a given line of the tendons, kN, with the
+ * Draped force of the heaviest span after all losses that ultimate bending asks for along a given line of the tendons, kN, with the
  * compression zone of the force of the pass before. Infinity where more force makes it worse.
  */
 export function ultimateNeed(
@@ -17,7 +19,8 @@ export function ultimateNeed(
   lastingMPa: number,
   straightM2: number,
   beforeKN: number,
-): (depthM: Float64Array, parasiticM: Float64Array) => number {
+  { share }: TendonShapes,
+): (line: TendonLine) => number {
   const { task, layout, standard } = model;
   const { down, up } = ultimateMoments(model, own);
   const grown = strandDesignMPa(model) / lastingMPa;
@@ -40,21 +43,22 @@ export function ultimateNeed(
       },
     ] as const;
     faces.forEach((face, side) => {
-      const c = compressionDepth(model, face, beforeKN * grown + straightKN + bars[side]!);
+      const c = compressionDepth(model, face, beforeKN * grown * share[i]! + straightKN + bars[side]!);
       block[side]![i] = c;
       fixed[side]![i] =
         straightKN * (task.depthM - ductCover - c) + bars[side]! * (task.depthM - ductCover / 2 - c);
     });
   }
   const prestress = standard.factors.uls.prestress;
-  return (depthM, parasiticM) => {
+  return ({ depthM, parasiticM }) => {
     let most = 0;
     for (let i = 0; i < n; i++) {
       const m = prestress * parasiticM[i]!;
+      const strength = grown * share[i]!;
       const sag = down[i]! - fixed[0][i]!;
-      if (sag > 0) most = Math.max(most, over(sag, grown * (depthM[i]! - block[0][i]!) - m));
+      if (sag > 0) most = Math.max(most, over(sag, strength * (depthM[i]! - block[0][i]!) - m));
       const hog = up[i]! - fixed[1][i]!;
-      if (hog > 0) most = Math.max(most, over(hog, grown * (task.depthM - depthM[i]! - block[1][i]!) + m));
+      if (hog > 0) most = Math.max(most, over(hog, strength * (task.depthM - depthM[i]! - block[1][i]!) + m));
     }
     return most;
   };

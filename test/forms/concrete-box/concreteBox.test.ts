@@ -99,6 +99,13 @@ describe('concreteBox', () => {
     );
   });
 
+  it('does not give short spans the strands of one long span', () => {
+    const strand = (spansM: number[]): number => concreteBox.size(boxTask(spansM, 2.6)).figures.strandKgM2!;
+    const uneven = strand([40, 42, 63, 42, 40]);
+    expect(uneven).toBeLessThan(0.9 * strand([50, 63, 63, 63, 50]));
+    expect(uneven).toBeGreaterThan(strand([33, 42, 42, 42, 33]));
+  });
+
   it('says which limit is passed where the depth is out of all reason', () => {
     const design = concreteBox.size(boxTask(usualSpans(80, 3), 1.4));
     expect(design.limitingCheck.utilisation).toBeGreaterThan(1);

@@ -4,6 +4,7 @@ import { boxModel } from '../../../lib/forms/concrete-box/boxModel.ts';
 import { leastForce, type Drape } from '../../../lib/forms/concrete-box/leastForce.ts';
 import { tendonStress } from '../../../lib/forms/concrete-box/tendonForce.ts';
 import { tendonGroup } from '../../../lib/forms/concrete-box/tendonGroup.ts';
+import { sharePowers, tendonShare } from '../../../lib/forms/concrete-box/tendonShare.ts';
 import { tendonShapes } from '../../../lib/forms/concrete-box/tendonShape.ts';
 import { lineBeam } from '../../../lib/mechanics/index.ts';
 import { boxTask } from './cases.ts';
@@ -45,6 +46,34 @@ describe('tendonShapes()', () => {
       // Largest curvature of unit drape, 2 / (half span x turn of a tenth), over one station squared.
       expect(turn(inner) + turn(pier) + turn(end)).toBeLessThan(2 * 1.05 * ((2 / (25 * 5)) * 0.25 ** 2));
     }
+  });
+});
+
+describe('tendonShare()', () => {
+  const spans = [41, 42.5, 63, 42.5, 41];
+  const beam = lineBeam({ spansM: spans });
+  const middle = (share: Float64Array): number[] => spans.map((_, span) => share[20 * span + 10]!);
+
+  it('keeps every strand at power 0, and where the spans bend alike nothing else is tried', () => {
+    expect(new Set(tendonShare(spans, beam, 0))).toEqual(new Set([1]));
+    expect(sharePowers([40, 50, 50, 40])).toEqual([0]);
+    expect(sharePowers(spans)).toEqual([0, 1, 2]);
+  });
+
+  it('shares strands out by the span, an end span counting as an inner one of 1.25 times its length', () => {
+    const ends = 41 / 0.8 / 63;
+    const inner = 42.5 / 63;
+    [ends, inner, 1, inner, ends].forEach((share, span) =>
+      expect(middle(tendonShare(spans, beam, 1))[span]).toBeCloseTo(share, 12),
+    );
+    expect(middle(tendonShare(spans, beam, 2))[1]).toBeCloseTo(inner ** 2, 12);
+  });
+
+  it('gives a pier the strands of its heavier span and never steps', () => {
+    const share = tendonShare(spans, beam, 1);
+    expect(share[beam.supportAt[2]!]).toBe(1);
+    expect(share[beam.supportAt[1]!]).toBeCloseTo(41 / 0.8 / 63, 12);
+    for (let i = 1; i < share.length; i++) expect(Math.abs(share[i]! - share[i - 1]!)).toBeLessThan(0.15);
   });
 });
 
