@@ -10,7 +10,7 @@ import type { Sizer } from './sizer.ts';
 /** Governing spans at which each form is really sized; in between the table is read off straight lines. */
 const TABLE_SPANS = 10;
 /** Shares of the governing span at which the shorter spans of a unit are sized with the depth of the longest. */
-const SHARES = [0.5, 0.75, 1] as const;
+const SHARES = [0.5, 1] as const;
 /** Depths tried for each row before the two beside the best. */
 const TABLE_TRIALS = 3;
 /** Spans under this are culverts, m. */
@@ -139,8 +139,16 @@ export interface TableShelf {
   tableFor(asked: FormAndMethod): CostTable;
 }
 
-/** Spans beside a support at which it is really sized, every so many m; in between its cost is read off straight lines. */
-const SPAN_STEP_M = 20;
+/**
+ * Loads, kN, at which a trial pier is really sized at each chainage, permanent and traffic together; in between its cost is
+ * read off straight lines. A pier feels the form it carries through its load.
+ */
+const PIER_LOADS_KN = [1500, 4000, 8000, 14000, 24000, 45000, 90000] as const;
+/** Of that load, what is permanent, and the depth of the deck on it, m: ordinary road decks. */
+const PIER_PERMANENT = 0.7;
+const PIER_DECK_DEPTH_M = 2;
+/** Span over which the trial load is spread, m: gives wind and friction their size. */
+const PIER_SPAN_M = 40;
 
 /**
  * What the search knows of cost, made by the real sizing, take-off and mean rates: deck cost and depth of each form
@@ -150,7 +158,7 @@ const SPAN_STEP_M = 20;
  */
 export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf {
   const shelf = new Map<string, Rows>();
-  const piers = new Map<string, number>();
+  const piers = new Map<number, number>();
   const rowsFor = (asked: FormAndMethod): Rows => {
     const key = `${asked.form} ${asked.method}`;
     const found = shelf.get(key) ?? rowsOf(asked, site, size, costOf);
@@ -160,6 +168,23 @@ export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf 
   const roadLevel = (chainageM: number): number => {
     const { road, startM, lengthM } = site;
     return road.startLevelM + ((road.endLevelM - road.startLevelM) * (chainageM - startM)) / lengthM;
+  };
+
+  /** A trial pier at a chainage under one of the loads, at mean rates with the odds of the ground. */
+  const pierCost = (chainageM: number, load: number): number => {
+    const key = chainageM * PIER_LOADS_KN.length + load;
+    const found = piers.get(key);
+    if (found !== undefined) return found;
+    const perM = PIER_LOADS_KN[load]! / PIER_SPAN_M;
+    const deck = {
+      permanentKNm: PIER_PERMANENT * perM,
+      trafficKNm: (1 - PIER_PERMANENT) * perM,
+      depthM: PIER_DECK_DEPTH_M,
+    };
+    const pier = standPierBetween(site, deck, chainageM, PIER_SPAN_M, PIER_SPAN_M, roadLevel(chainageM));
+    const cost = costOf(expectedLines(pier));
+    piers.set(key, cost);
+    return cost;
   };
 
   const tableFor = (asked: FormAndMethod): CostTable => {
@@ -172,19 +197,6 @@ export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf 
       const high = share > 0 ? value(rows.row(i + 1)) : 0;
       return (1 - share) * low + share * high;
     };
-    /** A pier between two equal spans, at mean rates with the odds of the ground. */
-    const pierCost = (form: FormId, chainageM: number, spanM: number): number => {
-      const key = `${form} ${form === asked.form ? asked.method : ''} ${chainageM} ${spanM}`;
-      const found = piers.get(key);
-      if (found !== undefined) return found;
-      const rows = rowsBy(form);
-      const [i, share] = between(rows.spansM, spanM);
-      const deck = deckOnSupport(rows.row(share > 0.5 ? i + 1 : i).design);
-      const pier = standPierBetween(site, deck, chainageM, spanM, spanM, roadLevel(chainageM));
-      const cost = costOf(expectedLines(pier));
-      piers.set(key, cost);
-      return cost;
-    };
     return {
       deckPerM(form, spanM, governingM) {
         const [i, within] = between(SHARES, governingM > 0 ? spanM / governingM : 1);
@@ -196,10 +208,13 @@ export function tableShelf(site: Site, size: Sizer, costOf: CostOf): TableShelf 
         read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),
       support(form, chainageM, spanLeftM, spanRightM) {
         const mean = (spanLeftM + spanRightM) / 2;
-        const below = Math.max(1, Math.floor(mean / SPAN_STEP_M));
-        const share = Math.min(1, Math.max(0, mean / SPAN_STEP_M - below));
-        const low = pierCost(form, chainageM, below * SPAN_STEP_M);
-        return share > 0 ? low + share * (pierCost(form, chainageM, (below + 1) * SPAN_STEP_M) - low) : low;
+        const rows = rowsBy(form);
+        const [i, share] = between(rows.spansM, mean);
+        const { permanentKNm, trafficKNm } = deckOnSupport(rows.row(share > 0.5 ? i + 1 : i).design);
+        const loadKN = (permanentKNm + trafficKNm) * mean;
+        const [k, within] = between(PIER_LOADS_KN, loadKN);
+        const low = pierCost(chainageM, k);
+        return within > 0 ? low + within * (pierCost(chainageM, k + 1) - low) : low;
       },
     };
   };

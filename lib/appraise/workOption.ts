@@ -120,6 +120,23 @@ function workAt(bench: Workbench, option: Option, depthM: number): AtDepth {
   };
 }
 
+/** Depths tried before the two beside the best. */
+const TRIALS = 4;
+
+/**
+ * Depths worth trying, m: from the least of the published band to somewhat over that of least deck cost. Clearance, road
+ * and supports only ever ask for less depth than the deck alone.
+ */
+function depthsToTry(bench: Workbench, option: Option, main: Unit): readonly [least: number, most: number] {
+  const spans = spansOf(main);
+  const [least, most] = depthRange(main.form, option.method, spans, bench.site.deck);
+  const deckAlone = bench.tables.tableFor(option).depthM(main.form, Math.max(...spans));
+  return [least, Math.max(least, Math.min(most, OVER_DECK_ALONE * deckAlone))];
+}
+
+/** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
+const OVER_DECK_ALONE = 1.15;
+
 /**
  * Works out one option: designs of its units, road profile, supports, take-off and programme. A depth that the option
  * leaves open is the shallowest within 1 % of the least cost of the whole crossing inside the published band.
@@ -137,13 +154,17 @@ export function workOption(bench: Workbench, option: Option): WorkedOption {
   };
   const depthM =
     option.depthM ??
-    leastCostDepth(depthRange(main.form, option.method, spansOf(main), site.deck), (trial) => {
-      const { cost, designs, profile } = at(trial);
-      const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
-      const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
-      // A depth that fouls a clearance fits no better than one that is too weak.
-      return { cost, utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation };
-    });
+    leastCostDepth(
+      depthsToTry(bench, option, main),
+      (trial) => {
+        const { cost, designs, profile } = at(trial);
+        const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
+        const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
+        // A depth that fouls a clearance fits no better than one that is too weak.
+        return { cost, utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation };
+      },
+      TRIALS,
+    );
   const { designs, profile, supports, lines, months } = at(depthM);
   const design = designs[option.units.indexOf(main)]!;
   return {
