@@ -14,7 +14,7 @@ import { rowHead } from './rowHead.ts';
 import type { Table } from './table.ts';
 
 /** Columns of the chart, per m2 of deck. */
-export const quantityColumns = ['concrete', 'steel', 'bars', 'strand'] as const;
+const quantityColumns = ['concrete', 'steel', 'bars', 'strand'] as const;
 export type QuantityColumn = (typeof quantityColumns)[number];
 
 interface ColumnLook {

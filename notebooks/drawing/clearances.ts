@@ -172,7 +172,7 @@ export function barredDimension(site: Site, frame: Frame, y: number, accent: str
 }
 
 /** Neighbouring hard zones run together, with one name: [from, to, words]. */
-export function barredStretches(
+function barredStretches(
   site: Site,
 ): { readonly fromM: number; readonly toM: number; readonly words: string }[] {
   const hard = site.zones.filter((zone) => zone.hard).sort((a, b) => a.fromM - b.fromM);

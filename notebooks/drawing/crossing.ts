@@ -16,6 +16,7 @@ import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
+import { pierHandles } from './pierHandles.ts';
 import { placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
@@ -39,6 +40,8 @@ export interface CrossingInput {
   /** Data band under the elevation; on unless said otherwise, and off at 1:2000 and smaller. */
   readonly band?: boolean;
   readonly bar?: boolean;
+  /** Piers can be taken hold of. */
+  readonly handles?: boolean;
   readonly prefix?: string;
 }
 
@@ -177,6 +180,7 @@ export function crossing(input: CrossingInput): Piece {
         levels,
         named,
         below,
+        input.handles === true && option !== null && pierHandles(option, frame),
       ),
       several &&
         !small &&
@@ -199,5 +203,6 @@ export function crossing(input: CrossingInput): Piece {
           'stroke-width': pens.fine,
         }),
     ],
+    input.handles === true ? 'group' : 'img',
   );
 }

@@ -8,7 +8,7 @@ import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 
 /** Height of one row, px. */
-export const bandRow = 15.2;
+const bandRow = 15.2;
 
 /** Room the row names take at the left, px. */
 const nameRoom = 40;
@@ -17,7 +17,7 @@ const nameRoom = 40;
  * Chainages at which the band states its figures: supports first, then ends of limits and barred stretches, then bends
  * of the ground, then tens; each is taken only where there is room for its figure.
  */
-export function bandChainages(site: Site, option: AppraisedOption | null, frame: Frame): number[] {
+function bandChainages(site: Site, option: AppraisedOption | null, frame: Frame): number[] {
   const pitch = 33;
   const ground = site.groundX.filter((x, index) => {
     const before = site.groundX[index - 1];

@@ -66,7 +66,7 @@ export function elevationBody(
 ): Piece {
   const plain = style.plain === true;
   return g(
-    { class: 'elevation' },
+    { class: 'elevation', 'data-scale': frame.scale, 'data-from-m': frame.fromM },
     waters(site, frame),
     style.floodLine === true && flood(site, frame),
     ground(site, frame, plain ? { pen: pens.medium, hatch: false } : {}),
@@ -77,7 +77,7 @@ export function elevationBody(
 }
 
 /** Side margin left of A and right of B, as a share of what is free, and never less than this, px. */
-export const sideMargin = 30;
+const sideMargin = 30;
 
 /** Chainages shown on a sheet of a given width: the crossing in the middle. */
 export function chainagesShown(

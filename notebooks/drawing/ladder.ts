@@ -22,7 +22,7 @@ export interface LadderInput {
 }
 
 /** Chainage over an obstacle's envelope at which least is left, m; its middle without an envelope. */
-export function tightestOver(site: Site, option: AppraisedOption, obstacle: Obstacle): number {
+function tightestOver(site: Site, option: AppraisedOption, obstacle: Obstacle): number {
   const fromM = obstacle.clearance?.fromM ?? obstacle.fromM;
   const toM = obstacle.clearance?.toM ?? obstacle.toM;
   let best = (fromM + toM) / 2;

@@ -1,12 +1,10 @@
 import { length, level } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
-import type { AppraisedOption, FormId } from '../model.ts';
-import { depthAt, placedUnits, spansOf, structureTop } from './alongOption.ts';
-import type { Site } from '../model.ts';
+import type { AppraisedOption, FormId, Site } from '../model.ts';
+import { spansOf, structureTop } from './alongOption.ts';
 
 /** Whether an option's main unit is deeper at its supports than at midspan. */
-export const isHaunched = (option: AppraisedOption): boolean =>
-  option.depthM.support > option.depthM.midspan + 0.05;
+const isHaunched = (option: AppraisedOption): boolean => option.depthM.support > option.depthM.midspan + 0.05;
 
 /** Heading of an option: the form, haunched where it is, and the form of its approaches where that is another. */
 export function optionTitle(option: AppraisedOption): string {
@@ -43,7 +41,3 @@ export const mainSpan = (option: AppraisedOption): number => {
   const spans = spansOf(option);
   return spans.indexOf(Math.max(...spans));
 };
-
-/** Whether an option has a worked-out deck to draw. */
-export const isDrawn = (option: AppraisedOption): boolean =>
-  placedUnits(option).some(({ fromM }) => Number.isFinite(depthAt(option, fromM)));

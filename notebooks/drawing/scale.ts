@@ -1,5 +1,5 @@
 /** The only scales drawings are made at: 1 to this. */
-export const scaleSeries = [100, 200, 250, 500, 1000, 2000, 2500, 5000] as const;
+const scaleSeries = [100, 200, 250, 500, 1000, 2000, 2500, 5000] as const;
 export type Scale = (typeof scaleSeries)[number];
 
 /** Pixels (96 to the inch) of one metre at 1:scale. */

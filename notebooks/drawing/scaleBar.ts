@@ -2,7 +2,7 @@ import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
-import { el, g, num } from './piece.ts';
+import { el, g } from './piece.ts';
 import type { Scale } from './scale.ts';
 import { pxPerMetre } from './scale.ts';
 
@@ -61,6 +61,3 @@ export function scaleBar(scale: Scale, x: number, y: number, style: ScaleBarStyl
       : label(x, y + 16, words, { fill: colours.second }),
   );
 }
-
-/** Foot of the bar as a run of text for narrow sheets. */
-export const scaleWords = (scale: Scale): string => `1:${num(scale)} at A3, heights not exaggerated`;

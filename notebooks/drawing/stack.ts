@@ -1,4 +1,5 @@
 import { moneyUnit } from '../format.ts';
+import type { AppraisedOption } from '../model.ts';
 import { formInk } from '../forms/formInk.ts';
 import { linearAxis, spreadValues } from './axis.ts';
 import { chainagesShown, crossingScale } from './elevation.ts';
@@ -6,18 +7,18 @@ import { narrowStack } from './narrowStack.ts';
 import type { Piece } from './piece.ts';
 import type { StackInput, StackSheet } from './stackSheet.ts';
 import { narrowBelow } from './stackSheet.ts';
-import { wideStack } from './wideStack.ts';
+import { rowHeight, stackFoot, stackHead, wideStack } from './wideStack.ts';
 
 export type { StackInput } from './stackSheet.ts';
 
-/**
- * The stack: one row per option on one chainage and one scale, with its cost on one common axis. A row is chosen by
- * click or key; `listenToStack` turns that into an event.
- */
-export function stack(input: StackInput): Piece {
-  const paper = input.paper ?? 'colour';
+/** What all rows share, and the width of the elevations. */
+function layOut(input: StackInput): {
+  readonly shared: StackSheet;
+  readonly bodyPx: number;
+  readonly narrow: boolean;
+} {
   const ink = formInk(
-    paper,
+    input.paper ?? 'colour',
     input.options.flatMap((option) => option.units.map((unit) => unit.form)),
     input.prefix ?? 'stack',
   );
@@ -40,5 +41,37 @@ export function stack(input: StackInput): Piece {
       : linearAxis(values, bodyPx + 30, input.widthPx - 8, 7),
     unit: moneyUnit(input.currency, largest),
   };
+  return { shared, bodyPx, narrow };
+}
+
+/**
+ * The stack: one row per option on one chainage and one scale, with its cost on one common axis. A row is chosen by
+ * click or key; `listenToStack` turns that into an event.
+ */
+export function stack(input: StackInput): Piece {
+  const { shared, bodyPx, narrow } = layOut(input);
   return narrow ? narrowStack(shared) : wideStack(shared, bodyPx);
+}
+
+/**
+ * The stack in parts no higher than a page, on the same scales, for printing; the width must be that of a full sheet.
+ * @param heightPx room on a page; 960 on A3 landscape
+ */
+export function stackOnPaper(input: StackInput, heightPx = 960): Piece[] {
+  const { shared, bodyPx } = layOut(input);
+  const room = heightPx - stackHead - stackFoot;
+  const parts: AppraisedOption[][] = [];
+  let left = 0;
+  for (const option of input.options) {
+    const height = rowHeight(shared, option, bodyPx);
+    const last = parts[parts.length - 1];
+    if (last === undefined || height > left) {
+      parts.push([option]);
+      left = room - height;
+    } else {
+      last.push(option);
+      left -= height;
+    }
+  }
+  return parts.map((options) => wideStack({ ...shared, input: { ...input, options } }, bodyPx));
 }

@@ -35,7 +35,7 @@ export interface StationLineInput {
 }
 
 /** How far a span between two stations stands off the line, px. */
-export const bulge = (lengthPx: number, most = 84): number => Math.min(most, 18 + 0.055 * lengthPx);
+const bulge = (lengthPx: number, most = 84): number => Math.min(most, 18 + 0.055 * lengthPx);
 
 /** A span left of the line: full from what is used, on a bearing; dashed to what uses it, on a roller. */
 function span(lineX: number, from: number, to: number, used: boolean): Piece {

@@ -6,8 +6,7 @@ import type { Piece } from './piece.ts';
 import { el, g, num, pathOf } from './piece.ts';
 
 /** Repeatable irregularity between 0 and 1, so that hand-like hatching is the same on every sheet. */
-export const jitter = (index: number): number =>
-  ((Math.imul(index + 1, 2654435761) >>> 8) & 0xffff) / 0x10000;
+const jitter = (index: number): number => ((Math.imul(index + 1, 2654435761) >>> 8) & 0xffff) / 0x10000;
 
 type XY = readonly [number, number];
 
@@ -22,7 +21,7 @@ export function groundPoints(site: Site, frame: Frame): XY[] {
 }
 
 /** Straight-line reading of a pixel line at x, or NaN outside it. */
-export function lineAt(points: readonly XY[], x: number): number {
+function lineAt(points: readonly XY[], x: number): number {
   for (let i = 1; i < points.length; i += 1) {
     const [x0, y0] = points[i - 1] ?? [0, 0];
     const [x1, y1] = points[i] ?? [0, 0];
@@ -66,7 +65,7 @@ export function ground(
 }
 
 /** Stretches of a water body where its bed lies below a level: [from, to] chainages, m. */
-export function wetStretches(site: Site, levelM: number, fromM: number, toM: number): [number, number][] {
+function wetStretches(site: Site, levelM: number, fromM: number, toM: number): [number, number][] {
   const xs = [fromM, ...site.groundX.filter((x) => x > fromM && x < toM), toM];
   const out: [number, number][] = [];
   let open: number | null = groundLevel(site, fromM) < levelM ? fromM : null;

@@ -169,11 +169,19 @@ function budgetLine(shared: StackSheet, top: number, bottom: number, words: bool
   );
 }
 
+/** Room over the first row for brackets and axis, and under the last for the scale bar, px. */
+export const stackHead = 46;
+export const stackFoot = 40;
+
+/** Height of an option's row with the space to the next, px. */
+export const rowHeight = (shared: StackSheet, option: AppraisedOption, bodyPx: number): number =>
+  wideRow(shared, option, 0, bodyPx).bottom + 6;
+
 /** All rows beside one another on a full sheet: elevations left, costs right. */
 export function wideStack(shared: StackSheet, bodyPx: number): Piece {
   const { input, ink, scale } = shared;
   const { site } = input;
-  const head = 46;
+  const head = stackHead;
   const rows: StackRow[] = [];
   let top = head;
   for (const option of input.options) {
@@ -183,7 +191,7 @@ export function wideStack(shared: StackSheet, bodyPx: number): Piece {
   }
   const bottom = top;
   const first = rows[0]?.frame ?? frameOf(scale, shared.shown, 0, { levelM: 0, y: head });
-  const height = bottom + 40;
+  const height = bottom + stackFoot;
   return sheet(
     input.widthPx + stackOutset,
     height,

@@ -2,9 +2,6 @@ import type { FormId } from '../model.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
 
-/** Field of a glyph, px. */
-export const glyphField = { width: 32, height: 16 } as const;
-
 type XY = readonly [x: number, y: number];
 const bar = (x: number, y: number, width: number, height: number): string =>
   `M${num(x)},${num(y)}h${num(width)}v${num(height)}h${num(-width)}Z`;

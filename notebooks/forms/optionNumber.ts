@@ -4,7 +4,7 @@ import type { Piece } from '../drawing/piece.ts';
 import { el, g } from '../drawing/piece.ts';
 
 /** Luminance of a colour, 0 to 1 (sRGB, as contrast is reckoned by WCAG 2). */
-export function luminance(colour: string): number {
+function luminance(colour: string): number {
   const [r = 0, green = 0, b = 0] = [1, 3, 5].map((at) => {
     const c = parseInt(colour.slice(at, at + 2), 16) / 255;
     return c <= 0.03928 ? c / 12.92 : ((c + 0.055) / 1.055) ** 2.4;

@@ -5,7 +5,8 @@ import { leastSoffit, lowestSoffit, supportChainages } from '../../notebooks/dra
 import { crossing } from '../../notebooks/drawing/crossing.ts';
 import { elevation } from '../../notebooks/drawing/elevation.ts';
 import { pxPerMetre } from '../../notebooks/drawing/scale.ts';
-import { stack } from '../../notebooks/drawing/stack.ts';
+import type { Piece } from '../../notebooks/drawing/piece.ts';
+import { stack, stackOnPaper } from '../../notebooks/drawing/stack.ts';
 import { toText } from '../../notebooks/drawing/toText.ts';
 import { expectGolden, elements, wordsOf } from './golden.ts';
 import { budget, obstacles, options, site, standing } from './fixture.ts';
@@ -94,6 +95,18 @@ describe('crossing(input)', () => {
     ).toBe(true);
   });
 
+  it('with handles gives every pier one that keys can reach, and the abutments none', () => {
+    const piece = crossing({ site, option: second, obstacles, widthPx: 980, handles: true });
+    const handles = [...elements(piece)].filter(({ attrs }) => attrs['class'] === 'handle');
+    expect(
+      handles.map(({ attrs }) => [attrs['data-support'], attrs['aria-valuenow'], attrs['tabindex']]),
+    ).toEqual([
+      ['1', '1310', '0'],
+      ['2', '1400', '0'],
+    ]);
+    expect(piece.attrs['role']).toBe('group');
+  });
+
   it('draws a site without zones, water, limits or ground classes', () => {
     const bare = { ...site, zones: [], waters: [], soffitLimits: [], groundStretches: [], mainOpening: null };
     const words = wordsOf(crossing({ site: bare, option: null, widthPx: 980 }));
@@ -151,6 +164,26 @@ describe('stack(input)', () => {
       widthPx: 1224,
     });
     expect(wordsOf(without).join(' ')).not.toMatch(/budget|reference/);
+  });
+});
+
+describe('stackOnPaper(input, height)', () => {
+  it('parts the rows without losing one, each part no higher than the page, on one money axis', () => {
+    const parts = stackOnPaper(
+      { site, options, standing, budget, currency: 'EUR', reference: 2, widthPx: 1224 },
+      600,
+    );
+    expect(parts.length).toBeGreaterThan(1);
+    for (const part of parts) expect(Number(part.attrs['height'])).toBeLessThanOrEqual(600);
+    const rowsOf = (part: (typeof parts)[number]) =>
+      [...elements(part)].flatMap(({ attrs }) => attrs['data-option'] ?? []);
+    expect(parts.flatMap(rowsOf)).toEqual(['1', '2', '3', '4', '5', '6']);
+    const budgetAt = parts
+      .map(
+        (part) => [...elements(part)].find(({ attrs }) => attrs['class'] === 'budget')!.children[0] as Piece,
+      )
+      .map(({ attrs }) => attrs['d']!.split(',')[0]);
+    expect(new Set(budgetAt).size).toBe(1);
   });
 });
 

@@ -70,6 +70,8 @@ const joined = { at: '3+010', uses: ['1+010', '2+010'], usedBy: ['4+010', '5+010
 export const sheets: Readonly<Record<string, () => Piece>> = {
   forms,
   crossing: () => crossing({ site, option: second, obstacles, widthPx: 980 }),
+  'crossing-handles': () =>
+    crossing({ site, option: second, obstacles, widthPx: 980, handles: true, band: false }),
   'crossing-bare': () => crossing({ site, option: null, obstacles, widthPx: 980 }),
   'crossing-small': () => crossing({ site, option: second, obstacles, widthPx: 358 }),
   'crossing-window': () =>

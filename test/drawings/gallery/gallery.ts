@@ -17,7 +17,7 @@ import { ladder } from '../../../notebooks/drawing/ladder.ts';
 import { listenToStack } from '../../../notebooks/drawing/listenToStack.ts';
 import { section } from '../../../notebooks/drawing/section.ts';
 import { sectionRow } from '../../../notebooks/drawing/sectionRow.ts';
-import { stack } from '../../../notebooks/drawing/stack.ts';
+import { stack, stackOnPaper } from '../../../notebooks/drawing/stack.ts';
 import { stationLine } from '../../../notebooks/drawing/stationLine.ts';
 import type { HtmlChild } from '../../../notebooks/html.ts';
 import { h } from '../../../notebooks/html.ts';
@@ -67,7 +67,7 @@ let reference = option.number;
 const cell = (name: string, content: HtmlChild, notes: HtmlChild = null, isWide = false): HTMLElement =>
   h(
     'div',
-    { class: isWide ? 'cell wide' : 'cell', id: name },
+    { class: isWide ? (name === '3+020' ? 'cell wide long' : 'cell wide') : 'cell', id: name },
     h('a', { class: 'station', href: `#${name}` }, name),
     h('div', { class: 'body' }, content),
     notes === null ? null : h('aside', { class: 'notes' }, notes),
@@ -91,8 +91,13 @@ function drawStack(): void {
   stackHolder.replaceChildren(
     h(
       'div',
-      {},
+      { class: 'on-screen' },
       stack({ site, options, standing, budget, currency: 'EUR', reference, widthPx: wide, paper }),
+    ),
+    h(
+      'div',
+      { class: 'on-paper' },
+      ...stackOnPaper({ site, options, standing, budget, currency: 'EUR', reference, widthPx: 1224, paper }),
     ),
   );
   listenToStack(stackHolder.querySelector('svg')!);
