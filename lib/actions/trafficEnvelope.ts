@@ -96,7 +96,8 @@ export function trafficEnvelope(
   const supports = beam.supportAt.length;
   at.forEach((station, j) => {
     const inner = station > 0 && station < n - 1;
-    const quest = { section: -1, hogging: false, innerReaction: inner && j < supports };
+    // The line of an end support breaks off at its peak, where the vehicle may stand with axles already past the end.
+    const quest = { section: inner ? -1 : station, hogging: false, innerReaction: inner && j < supports };
     beyond = trafficOnLine(shearLoad, track, beam.reactionLines[j]!, quest, out) || beyond;
     const [max, min] =
       j < supports ? [result.reactionMaxKN, result.reactionMinKN] : [result.springMaxKN, result.springMinKN];

@@ -12,7 +12,7 @@ import type { LongSpanLoad, TrafficLoad } from './trafficLoad.ts';
 
 /** What of a line is looked for. */
 export interface LineQuest {
-  /** Station of the section of a moment or shear, where the line has its peak or jump; -1 for other lines. */
+  /** Station where the line has its peak or jump: the section of a moment or shear, an end support; -1 for other lines. */
   readonly section: number;
   /** Hogging moment: longer wheelbases and two vehicles count towards the least value. */
   readonly hogging: boolean;

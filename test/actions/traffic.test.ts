@@ -308,3 +308,24 @@ describe('trafficOnInfluence(load, stations, ordinates)', () => {
     );
   });
 });
+
+it.each(['lm1', 'hl93'] as const)(
+  'trafficEnvelope(symmetrical beam, %s) presses on the last support as on the first, and as the shear beside it',
+  (id) => {
+    const deck = {
+      widthM: 12,
+      carriagewayM: 11,
+      carriagewayOffsetM: 0,
+      lanes: 3,
+      footwayM: 0,
+      surfacingM: 0.09,
+      superimposedKNm: 33,
+    };
+    const { reactionMaxKN, shearMinKN } = trafficEnvelope(
+      lineBeam({ spansM: [50, 63, 50] }),
+      trafficOnDeck(id, deck),
+    );
+    expect(reactionMaxKN[3]! / reactionMaxKN[0]!).toBeCloseTo(1, 6);
+    expect(-shearMinKN.at(-1)! / reactionMaxKN[3]!).toBeCloseTo(1, 6);
+  },
+);
