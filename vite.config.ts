@@ -52,6 +52,8 @@ export default defineConfig({
           exclude: ['test/browser/**'],
           isolate: false,
           setupFiles: ['test/setup.ts'],
+          testTimeout: 30_000,
+          hookTimeout: 60_000,
         },
       },
       {

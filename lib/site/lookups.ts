@@ -1,4 +1,7 @@
-import type { Site, SoffitLimit } from '../model/index.ts';
+import type { GroundStretch, Site, SoffitLimit } from '../model/index.ts';
+
+/** Places closer than this are the same, m. */
+const SAME_M = 1e-6;
 
 /** Ground or bed level at a chainage, m: straight between the surveyed points, level beyond the first and last. */
 export function groundAt(site: Site, chainageM: number): number {
@@ -28,13 +31,23 @@ export function waterDepthAt(site: Site, chainageM: number): number {
   return depth;
 }
 
-/** Index of the ground stretch a chainage lies in, or of the nearest one; -1 when the site has none. */
+/** Mean level of the bearing stratum of a stretch by its odds, m. */
+function meanBearingLevel({ classes }: GroundStretch): number {
+  return classes.reduce((sum, { odds, bearingLevelM }) => sum + odds * bearingLevelM, 0);
+}
+
+/**
+ * Index of the ground stretch a chainage lies in, or of the nearest one; -1 when the site has none. On the boundary of two
+ * it is the one with the deeper ground, whichever way the crossing is read.
+ */
 export function stretchAt(site: Site, chainageM: number): number {
   let nearest = -1;
   let least = Infinity;
   site.groundStretches.forEach((stretch, index) => {
     const away = Math.max(stretch.fromM - chainageM, chainageM - stretch.toM, 0);
-    if (away < least) {
+    const before = site.groundStretches[nearest];
+    const same = before !== undefined && Math.abs(away - least) <= SAME_M;
+    if (same ? meanBearingLevel(stretch) < meanBearingLevel(before) : away < least) {
       least = away;
       nearest = index;
     }

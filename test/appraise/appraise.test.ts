@@ -15,7 +15,7 @@ const withBrief = (change: Partial<Study['brief']>): Study => {
 const cheapest = (appraisal: Appraisal, form: string): Appraisal['options'][number] =>
   appraisal.options.find((option) => option.form === form)!;
 
-describe('appraise', () => {
+describe('appraise', { timeout: 60_000 }, () => {
   it('appraise(study) works out four forms of four families, cheapest first', () => {
     expect(new Set(base.options.map((option) => option.form))).toEqual(
       new Set(['composite-i', 'concrete-box', 'truss', 'cable-stayed']),
