@@ -67,7 +67,7 @@ export function ranking(input: RankingInput): Piece {
   const figure = (text: string, className = ''): Piece =>
     el('td', { class: `figure ${className}`.trim() }, text);
   const head = [
-    ['', ''],
+    ['number', 'mark'],
     ['option', ''],
     ['spans, m', ''],
     [unit.label, 'figure'],
@@ -89,7 +89,9 @@ export function ranking(input: RankingInput): Piece {
         'tr',
         {},
         head.map(([text = '', className = '']) =>
-          el('th', { scope: 'col', class: className === '' ? undefined : className }, text),
+          className === 'mark'
+            ? el('th', { scope: 'col' }, el('span', { class: 'unseen' }, text))
+            : el('th', { scope: 'col', class: className === '' ? undefined : className }, text),
         ),
       ),
     ),

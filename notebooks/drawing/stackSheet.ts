@@ -65,16 +65,13 @@ export function chosenRow(
   const within = input.standing.within[option.number];
   const words = `${optionWords(option)}: ${money2(p50 / unit.per)} ${unit.label}, ${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}${within === undefined ? '' : `, ${odds(within)} % within budget`}${option.status === 'out' ? ', out' : ''}`;
   return g(
-    {
-      class: reference ? 'row reference' : 'row',
+    { class: reference ? 'row reference' : 'row', 'data-option': option.number },
+    el('rect', {
+      class: 'frame',
       role: 'button',
       tabindex: 0,
       'aria-pressed': reference ? 'true' : 'false',
       'aria-label': words,
-      'data-option': option.number,
-    },
-    el('rect', {
-      class: 'frame',
       x: -4,
       y: top + 2,
       width: input.widthPx + 8,
@@ -83,7 +80,7 @@ export function chosenRow(
       'fill-opacity': 0,
       stroke: 'none',
     }),
-    children,
+    g({ 'aria-hidden': 'true' }, children),
     reference &&
       el('path', {
         d: `M${num(2.65 / 2 - stackOutset)},${num(top + 4)}V${num(bottom - 4)}`,
