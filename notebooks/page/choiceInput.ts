@@ -1,8 +1,8 @@
 import { h } from '../html.ts';
-import type { Origin } from './figureInput.ts';
+import type { Origin } from './figureSpec.ts';
 import { nextId } from './nextId.ts';
 import type { Way } from './refusal.ts';
-import { refusalSlot } from './refusal.ts';
+import { markRefused, refusalSlot } from './refusal.ts';
 
 export interface Choice<T extends string> {
   readonly value: T;
@@ -41,14 +41,8 @@ export function choiceInput<T extends string>(spec: ChoiceSpec<T>): ChoiceInput<
   const dress = (isRefused = false): void => {
     field.value = value;
     field.className = `fig ${value === 'unknown' ? 'unknown' : origin}${isRefused ? ' refused' : ''}`;
-    if (isRefused) {
-      field.setAttribute('aria-invalid', 'true');
-      field.setAttribute('aria-describedby', refusal.element.id);
-    } else {
-      field.removeAttribute('aria-invalid');
-      field.removeAttribute('aria-describedby');
-      refusal.clear();
-    }
+    markRefused(field, isRefused ? refusal : null);
+    if (!isRefused) refusal.clear();
   };
   field.addEventListener('change', () => {
     const chosen = spec.choices.find((choice) => choice.value === field.value);

@@ -1,41 +1,12 @@
 import { toDom } from '../drawing/toDom.ts';
 import { h } from '../html.ts';
 import { draggable } from './dragging.ts';
+import { figureField } from './figureField.ts';
 import { figureScale, STEP_PX } from './figureScale.ts';
-import type { ScaleMark } from './figureScale.ts';
-import type { Figure, FigureRules } from './figureText.ts';
+import type { FigureSpec, Origin } from './figureSpec.ts';
+import type { Figure } from './figureText.ts';
 import { judgeFigure, movedFigure, readFigure, smallestStep, writeFigure } from './figureText.ts';
-import { nextId } from './nextId.ts';
 import type { Way } from './refusal.ts';
-import { refusalSlot } from './refusal.ts';
-
-/** Where a figure comes from: typed here, or preset and to be confirmed. */
-export type Origin = 'typed' | 'preset';
-
-/** A figure in a sentence or table. Limits, places and steps are in the unit shown. */
-export interface FigureSpec extends FigureRules {
-  /** What it is, for those who do not see the sentence: 'clear opening'. */
-  readonly label: string;
-  /** In the unit of the study. */
-  readonly value: Figure;
-  readonly origin?: Origin;
-  /** The shown figure is the value times this, e.g. 100 for a ratio shown in per cent; 1 unless given. */
-  readonly per?: number;
-  /** Worth of one step of the arrow keys and of the scale; 1 unless given. */
-  readonly step?: number;
-  /** Where stepping starts from when the value is unknown; the lower limit or 0 unless given. */
-  readonly from?: number;
-  /** Tells a field from others of its cell across drawings of it anew; the label unless given. */
-  readonly key?: string;
-  /** Values, in the unit shown, at which something happens; asked once a drag. */
-  readonly marks?: () => readonly ScaleMark[];
-  /** Every new value of a drag, of arrow keys, or of typing that pauses. */
-  readonly input?: (value: Figure) => void;
-  /** Once at the end of each go that was told by `input`, also when it came back to where it began. */
-  readonly change?: (value: Figure) => void;
-  /** Enter on a preset that was left as it is. */
-  readonly confirm?: () => void;
-}
 
 export interface FigureInput {
   readonly element: HTMLElement;
@@ -55,8 +26,7 @@ const stepKeys: Readonly<Record<string, number>> = { ArrowUp: 1, ArrowDown: -1, 
  * typed. Enter keeps, Escape goes back. A value against the limits is refused with a way on; the last good one is kept.
  */
 export function figureInput(spec: FigureSpec): FigureInput {
-  const { label, unit, unknown, places, per = 1, step = 1 } = spec;
-  const id = nextId('figure');
+  const { unknown, places, per = 1, step = 1 } = spec;
   const toShown = (value: Figure): Figure =>
     value === 'unknown' ? value : Number((value * per).toPrecision(12));
   const toValue = (shown: Figure): Figure =>
@@ -76,50 +46,13 @@ export function figureInput(spec: FigureSpec): FigureInput {
   let isReleased = false;
   let pause: ReturnType<typeof setTimeout> | undefined;
 
-  const field = h('span', {
-    class: 'fig',
-    role: 'spinbutton',
-    tabindex: 0,
-    contenteditable: 'plaintext-only',
-    inputmode: 'decimal',
-    spellcheck: 'false',
-    'aria-label': unit === undefined ? label : `${label}, ${unit}`,
-    'aria-description': `Arrow keys step ${step}, with Shift ${step * 10}, with Alt ${step / 10}; Enter keeps, Escape goes back${unknown === undefined ? '' : '; ? for not known'}`,
-    ...(spec.min && { 'aria-valuemin': spec.min.value }),
-    ...(spec.max && { 'aria-valuemax': spec.max.value }),
-  });
-  const below = h('span', { class: 'below' });
-  const refusal = refusalSlot(`${id}-refusal`);
-  const element = h('span', { class: 'entry', 'data-key': spec.key ?? label }, field, below, refusal.element);
-
-  const dress = (): void => {
-    const kind = shown === 'unknown' ? 'unknown' : origin;
-    field.className = `fig ${kind}${isRefused ? ' refused' : ''}`;
-    if (shown === 'unknown') field.removeAttribute('aria-valuenow');
-    else field.setAttribute('aria-valuenow', String(shown));
-    const words = writeFigure(shown, spec);
-    field.setAttribute(
-      'aria-valuetext',
-      unit === undefined || shown === 'unknown' ? words : `${words} ${unit}`,
-    );
-    if (isRefused) {
-      field.setAttribute('aria-invalid', 'true');
-      field.setAttribute('aria-describedby', refusal.element.id);
-    } else {
-      field.removeAttribute('aria-invalid');
-      field.removeAttribute('aria-describedby');
-    }
-  };
+  const parts = figureField(spec);
+  const { element, field, below, refusal, hasFocus, selectAll } = parts;
+  const dress = (): void => parts.dress(shown, origin, isRefused);
   const write = (): void => {
-    const words = writeFigure(shown, spec);
-    if (field.textContent !== words) {
-      field.textContent = words;
-      if (hasFocus() && !isDragged) selectAll();
-    }
+    parts.write(shown, !isDragged);
     dress();
   };
-  const hasFocus = (): boolean => field.ownerDocument.activeElement === field;
-  const selectAll = (): void => field.ownerDocument.getSelection()?.selectAllChildren(field);
 
   const unrefuse = (): void => {
     isRefused = false;
@@ -127,6 +60,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
   };
   const stopTyping = (): void => {
     isTyping = false;
+    element.classList.remove('typing');
     clearTimeout(pause);
   };
 
@@ -236,6 +170,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
   });
   field.addEventListener('input', () => {
     isTyping = true;
+    element.classList.add('typing');
     isReleased = false;
     clearTimeout(pause);
     pause = setTimeout(() => takeTyped(false), PAUSE_MS);

@@ -10,13 +10,15 @@ export {
   type StudyStore,
 } from './store.ts';
 export { fieldsOf, type FieldOptions, type Fields } from './fields.ts';
-export { figureInput, type FigureInput, type FigureSpec, type Origin } from './figureInput.ts';
+export { figureInput, type FigureInput } from './figureInput.ts';
+export type { FigureSpec, Origin } from './figureSpec.ts';
 export type { Figure, FigureRules, Limit } from './figureText.ts';
 export type { ScaleMark } from './figureScale.ts';
 export { choiceInput, type Choice, type ChoiceInput, type ChoiceSpec } from './choiceInput.ts';
 export { wordsInput, type WordsInput, type WordsSpec } from './wordsInput.ts';
 export { standing, type StandingSpec } from './standing.ts';
 export { draggable, type Drag, type DragAt } from './dragging.ts';
+export { undoKeys, type Undoable } from './undoKeys.ts';
 export { waysOn, type Way } from './refusal.ts';
 export { getAt, isWithin, putAt, type Path } from './place.ts';
 export { share } from './share.ts';

@@ -33,3 +33,14 @@ export function refusalSlot(id: string): RefusalSlot {
     },
   };
 }
+
+/** Tells those who do not see it whether a field is refused, and by what words. */
+export function markRefused(field: HTMLElement, refusal: RefusalSlot | null): void {
+  if (refusal === null) {
+    field.removeAttribute('aria-invalid');
+    field.removeAttribute('aria-describedby');
+  } else {
+    field.setAttribute('aria-invalid', 'true');
+    field.setAttribute('aria-describedby', refusal.element.id);
+  }
+}

@@ -1,8 +1,8 @@
 import { h } from '../html.ts';
-import type { Origin } from './figureInput.ts';
+import type { Origin } from './figureSpec.ts';
 import { nextId } from './nextId.ts';
 import type { Way } from './refusal.ts';
-import { refusalSlot } from './refusal.ts';
+import { markRefused, refusalSlot } from './refusal.ts';
 
 /** Words to be typed in a sentence: a name, a title, a reason. */
 export interface WordsSpec {
@@ -43,17 +43,15 @@ export function wordsInput(spec: WordsSpec): WordsInput {
 
   const dress = (isRefused = false): void => {
     field.className = `fig words ${origin}${isRefused ? ' refused' : ''}`;
-    if (isRefused) {
-      field.setAttribute('aria-invalid', 'true');
-      field.setAttribute('aria-describedby', refusal.element.id);
-    } else {
-      field.removeAttribute('aria-invalid');
-      field.removeAttribute('aria-describedby');
-      refusal.clear();
-    }
+    markRefused(field, isRefused ? refusal : null);
+    if (!isRefused) refusal.clear();
+  };
+  const setTyping = (next: boolean): void => {
+    isTyping = next;
+    element.classList.toggle('typing', next);
   };
   const write = (): void => {
-    isTyping = false;
+    setTyping(false);
     if (field.textContent !== value) field.textContent = value;
     dress();
   };
@@ -63,6 +61,7 @@ export function wordsInput(spec: WordsSpec): WordsInput {
   };
   const keep = (): void => {
     if (!isTyping) return;
+    setTyping(false);
     const typed = field.textContent.replace(/\s+/gu, ' ').trim();
     if (typed.length > most) {
       refuse(`Refused: at most ${most} characters, not ${typed.length}. '${value}' is kept.`, [
@@ -77,9 +76,7 @@ export function wordsInput(spec: WordsSpec): WordsInput {
     if (isChanged) spec.change(value);
   };
 
-  field.addEventListener('input', () => {
-    isTyping = true;
-  });
+  field.addEventListener('input', () => setTyping(true));
   field.addEventListener('blur', keep);
   field.addEventListener('keydown', (event) => {
     if (event.key === 'Enter') keep();

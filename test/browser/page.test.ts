@@ -245,6 +245,17 @@ describe('a field of the study', () => {
     expect(await field('end, m').textContent()).toBe('1\u2009470');
   });
 
+  it('Ctrl+Z undoes and Shift+Ctrl+Z redoes, but not while text is being typed', async () => {
+    await field('end, m').focus();
+    await key('ArrowUp', 'Enter', 'Control+z');
+    expect(await field('end, m').textContent()).toBe('1\u2009470');
+    await key('Control+Shift+z');
+    expect(await field('end, m').textContent()).toBe('1\u2009471');
+    await page.keyboard.type('1');
+    await key('Control+z');
+    expect(await trial(({ draft }) => draft().brief.crossing.endM)).toBe(1471);
+  });
+
   it('a study that is not valid is said beside the field, the last valid one is kept, and there is a way back', async () => {
     await field('end, m').click();
     await page.keyboard.type('1200');

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { keyLine } from '../../notebooks/drawing/keyLine.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
-import { bulge, stationLine } from '../../notebooks/drawing/stationLine.ts';
+import { stationLine } from '../../notebooks/drawing/stationLine.ts';
 
 const all = (piece: Piece): Piece[] => [
   piece,
@@ -24,16 +24,30 @@ const input = { heightPx: 2400, marks };
 const joined = { at: '1+020', uses: ['1+010'], usedBy: ['2+010', '2+020', '2+030'] };
 const curves = (piece: Piece): Piece[] => all(piece).filter(({ attrs }) => attrs['d']?.includes('C'));
 
-describe('bulge', () => {
-  it('bulge(length) is 18 px and 0.055 of the length, at most 84', () => {
-    expect(bulge(0)).toBe(18);
-    expect(bulge(200)).toBe(29);
-    expect(bulge(1200)).toBe(84);
-    expect(bulge(5000)).toBe(84);
-  });
-});
-
 describe('stationLine', () => {
+  it.each([
+    [200, 29],
+    [600, 51],
+    [1200, 84],
+    [5000, 84],
+  ])(
+    'stationLine stands a span of %d px off the line by 18 px and 0.055 of it, at most 84: %d px',
+    (length, off) => {
+      const far = [
+        { name: '1+010', y: 0 },
+        { name: '9+010', y: length },
+      ];
+      const piece = stationLine({
+        heightPx: length + 100,
+        marks: far,
+        joined: { at: '9+010', uses: ['1+010'], usedBy: [] },
+      });
+      const [, handle] = /C(-?[\d.]+),/u.exec(curves(piece)[0]?.attrs['d'] ?? '') ?? [];
+      // The middle of a cubic curve stands three quarters of the way to its handles.
+      expect(Math.abs(0.75 * (112 - Number(handle)) - off)).toBeLessThan(0.35);
+    },
+  );
+
   it('stationLine(joined) draws full spans to bearings and dashed ones to rollers, and a dot at the cell', () => {
     const piece = stationLine({ ...input, joined });
     const dashed = curves(piece).filter(({ attrs }) => attrs['stroke-dasharray'] !== undefined);

@@ -15,6 +15,7 @@ import {
   standing,
   studyShelf,
   studyStore,
+  undoKeys,
 } from '../../../notebooks/page/index.ts';
 import type { Figure, Path } from '../../../notebooks/page/index.ts';
 import { graph } from '../../../notebooks/reactive/index.ts';
@@ -288,6 +289,7 @@ page.mount(document.body, {
   ],
 });
 
+undoKeys(store);
 const setField = (path: Path, value: unknown): void => store.edit((study) => putAt(study, path, value));
 
 /** What the test asks of the page. */
