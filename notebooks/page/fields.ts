@@ -1,4 +1,4 @@
-import type { Problem } from '../../lib/index.ts';
+import type { Problem, Study } from '../../lib/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import type { ChoiceSpec } from './choiceInput.ts';
 import { choiceInput } from './choiceInput.ts';
@@ -21,21 +21,58 @@ export interface FieldOptions {
   readonly isPreset?: (draft: unknown) => boolean;
 }
 
+/** A value of the study that is no single entry of it, e.g. a width between two chainages: how it is read and written. */
+export interface Made<T> {
+  /** Tells it from the other fields of the page. */
+  readonly key: string;
+  readonly get: (study: Study) => T;
+  readonly put: (study: Study, value: T) => Study;
+  /** Whether it can be read, e.g. from an entry of a list that may have become shorter; always unless given. */
+  readonly has?: (study: Study) => boolean;
+  /** Places whose problems are said beside it. */
+  readonly owns?: readonly Path[];
+}
+
+/** Where a field stands: an entry of the study, or a value made from several. */
+export type FieldPlace<T> = Path | Made<T>;
+
 export interface Fields {
-  /** A figure of the study at a path, in step with it both ways. */
-  readonly figure: (path: Path, spec: Omit<FigureSpec, Bound> & FieldOptions) => HTMLElement;
-  /** A choice of the study at a path, in step with it both ways. */
+  /** A figure of the study, in step with it both ways. */
+  readonly figure: (place: FieldPlace<Figure>, spec: Omit<FigureSpec, Bound> & FieldOptions) => HTMLElement;
+  /** A choice of the study, in step with it both ways. */
   readonly choice: <T extends string>(
-    path: Path,
+    place: FieldPlace<T>,
     spec: Omit<ChoiceSpec<T>, Bound> & FieldOptions,
   ) => HTMLElement;
-  /** Words of the study at a path, in step with it both ways. */
-  readonly words: (path: Path, spec: Omit<WordsSpec, Bound> & FieldOptions) => HTMLElement;
+  /** Words of the study, in step with it both ways. */
+  readonly words: (place: FieldPlace<string>, spec: Omit<WordsSpec, Bound> & FieldOptions) => HTMLElement;
+  /**
+   * Tells every draft to what is no field but follows the fields, e.g. a sum below them or a drawing over them.
+   * @param owns places whose problems are said there: only those at exactly these places are told
+   */
+  readonly follow: (
+    owns: readonly Path[],
+    show: (draft: Study, problems: readonly Problem[]) => void,
+  ) => void;
   /** Those problems that no field here says: to be said elsewhere on the page. */
   readonly unsaid: (problems: readonly Problem[]) => readonly Problem[];
   /** Takes all fields out of step. */
   readonly end: () => void;
 }
+
+/** An entry of the study as a value that is read and written. */
+function entryAt<T>(place: FieldPlace<T>): Required<Made<T>> {
+  if ('get' in place) return { has: () => true, owns: [], ...place };
+  return {
+    key: place.join('.'),
+    get: (study) => getAt(study, place) as T,
+    put: (study, value) => putAt(study, place, value),
+    has: (study) => hasAt(study, place),
+    owns: [place],
+  };
+}
+
+const samePath = (one: Path, other: Path): boolean => one.length === other.length && isWithin(one, other);
 
 /**
  * Fields tied to a store, for parts of a page that stand (a body that is not drawn anew): they show the draft, change
@@ -44,97 +81,108 @@ export interface Fields {
  */
 export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem) => string): Fields {
   const stops: (() => void)[] = [];
+  /** Whether a problem is said by one of these fields. */
+  const said: ((problem: Problem) => boolean)[] = [];
 
-  const tied: Path[] = [];
-
-  interface Shown {
-    readonly set: (value: never, origin: Origin) => void;
-    readonly refuse: (words: string | null, ways?: readonly Way[]) => void;
-    /** A value as the field writes it. */
-    readonly words: (value: never) => string;
-  }
-  const tie = (path: Path, shown: Shown, { isPreset }: FieldOptions): void => {
-    tied.push(path);
-    let isRefused = false;
-    const back = (): Way[] => {
-      if (!hasAt(store.valid(), path)) return [];
-      const good = getAt(store.valid(), path);
-      const take = (): void => {
-        store.edit((study) => putAt(study, path, good), { what: 'going back' });
-      };
-      return [{ words: `Back to ${shown.words(good as never)}`, take }];
-    };
+  const follow = (show: (draft: Study, problems: readonly Problem[]) => void): void => {
     stops.push(
       graph.view({ draft: store.draft, problems: store.problems }, (state) => {
-        if (state.state !== 'ready' || !hasAt(state.value.draft, path)) return;
-        const { draft, problems } = state.value;
-        shown.set(getAt(draft, path) as never, isPreset?.(draft) === true ? 'preset' : 'typed');
-        const mine = problems.filter((problem) => isWithin(problem.path, path));
-        if (mine.length > 0) {
-          shown.refuse(`${mine.map(say).join(' ')} The last valid study is kept.`, back());
-        } else if (isRefused) shown.refuse(null);
-        isRefused = mine.length > 0;
+        if (state.state === 'ready') show(state.value.draft, state.value.problems);
       }),
     );
   };
-  const start = (path: Path): unknown => {
+
+  interface Shown<T> {
+    readonly set: (value: T, origin: Origin) => void;
+    readonly refuse: (words: string | null, ways?: readonly Way[]) => void;
+    /** A value as the field writes it. */
+    readonly words: (value: T) => string;
+  }
+  const tie = <T>(entry: Required<Made<T>>, shown: Shown<T>, { isPreset }: FieldOptions): void => {
+    const isMine = (problem: Problem): boolean => entry.owns.some((path) => isWithin(problem.path, path));
+    said.push(isMine);
+    let isRefused = false;
+    const back = (): Way[] => {
+      if (!entry.has(store.valid())) return [];
+      const good = entry.get(store.valid());
+      const take = (): void => store.edit((study) => entry.put(study, good), { what: 'going back' });
+      return [{ words: `Back to ${shown.words(good)}`, take }];
+    };
+    follow((draft, problems) => {
+      if (!entry.has(draft)) return;
+      shown.set(entry.get(draft), isPreset?.(draft) === true ? 'preset' : 'typed');
+      const mine = problems.filter(isMine);
+      if (mine.length > 0) {
+        shown.refuse(`${mine.map(say).join(' ')} The last valid study is kept.`, back());
+      } else if (isRefused) shown.refuse(null);
+      isRefused = mine.length > 0;
+    });
+  };
+  const start = <T>(entry: Required<Made<T>>): T => {
     const state = graph.state(store.draft);
-    return getAt('value' in state ? state.value : undefined, path);
+    return entry.get('value' in state ? state.value : store.valid());
   };
   const put =
-    (path: Path, what: string) =>
-    (value: number | string): void =>
-      store.edit((study) => putAt(study, path, value), { coalesce: path.join('.'), what });
+    <T>({ key, put: change }: Required<Made<T>>, what: string) =>
+    (value: T): void =>
+      store.edit((study) => change(study, value), { coalesce: key, what });
 
   return {
-    figure(path, { isPreset, ...spec }) {
+    figure(place, { isPreset, ...spec }) {
+      const entry = entryAt(place);
       const figure = figureInput({
         ...spec,
-        value: start(path) as Figure,
-        key: path.join('.'),
-        input: put(path, spec.label),
+        value: start(entry),
+        key: entry.key,
+        input: put(entry, spec.label),
         change: store.endStep,
       });
       const words = (value: Figure): string =>
         writeFigure(value === 'unknown' ? value : value * (spec.per ?? 1), spec);
-      tie(path, { ...figure, words }, isPreset === undefined ? {} : { isPreset });
+      tie(entry, { ...figure, words }, isPreset === undefined ? {} : { isPreset });
       return figure.element;
     },
-    choice(path, { isPreset, ...spec }) {
-      const edit = put(path, spec.label);
-      const choice = choiceInput({
+    choice<T extends string>(
+      place: FieldPlace<T>,
+      { isPreset, ...spec }: Omit<ChoiceSpec<T>, Bound> & FieldOptions,
+    ) {
+      const entry = entryAt(place);
+      const edit = put(entry, spec.label);
+      const choice = choiceInput<T>({
         ...spec,
-        value: start(path) as (typeof spec.choices)[number]['value'],
-        key: path.join('.'),
+        value: start(entry),
+        key: entry.key,
         change(value) {
           edit(value);
           store.endStep();
         },
       });
-      const words = (value: string): string =>
-        spec.choices.find((one) => one.value === value)?.words ?? value;
-      tie(path, { ...choice, words }, isPreset === undefined ? {} : { isPreset });
+      const words = (value: T): string => spec.choices.find((one) => one.value === value)?.words ?? value;
+      tie(entry, { ...choice, words }, isPreset === undefined ? {} : { isPreset });
       return choice.element;
     },
-    words(path, { isPreset, ...spec }) {
-      const edit = put(path, spec.label);
+    words(place, { isPreset, ...spec }) {
+      const entry = entryAt(place);
+      const edit = put(entry, spec.label);
       const words = wordsInput({
         ...spec,
-        value: start(path) as string,
-        key: path.join('.'),
+        value: start(entry),
+        key: entry.key,
         change(value) {
           edit(value);
           store.endStep();
         },
       });
-      tie(
-        path,
-        { ...words, words: (value: string) => `'${value}'` },
-        isPreset === undefined ? {} : { isPreset },
-      );
+      const quoted = (value: string): string => `'${value}'`;
+      tie(entry, { ...words, words: quoted }, isPreset === undefined ? {} : { isPreset });
       return words.element;
     },
-    unsaid: (problems) => problems.filter((problem) => !tied.some((path) => isWithin(problem.path, path))),
+    follow(owns, show) {
+      const isMine = ({ path }: Problem): boolean => owns.some((own) => samePath(path, own));
+      said.push(isMine);
+      follow((draft, problems) => show(draft, problems.filter(isMine)));
+    },
+    unsaid: (problems) => problems.filter((problem) => !said.some((says) => says(problem))),
     end() {
       for (const stop of stops.splice(0)) stop();
     },

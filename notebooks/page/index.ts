@@ -9,7 +9,7 @@ export {
   type Slices,
   type StudyStore,
 } from './store.ts';
-export { fieldsOf, type FieldOptions, type Fields } from './fields.ts';
+export { fieldsOf, type FieldOptions, type FieldPlace, type Fields, type Made } from './fields.ts';
 export { figureInput, type FigureInput } from './figureInput.ts';
 export type { FigureSpec, Origin } from './figureSpec.ts';
 export type { Figure, FigureRules, Limit } from './figureText.ts';
