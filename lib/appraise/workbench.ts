@@ -12,7 +12,7 @@ export interface Workbench {
   /** Remembers designs from one appraisal to the next. */
   readonly size: Sizer;
   /** Money of measured lines at mean rates. */
-  costOf(lines: readonly MeasuredLine[]): number;
+  readonly costOf: (lines: readonly MeasuredLine[]) => number;
   readonly tables: TableShelf;
 }
 

@@ -22,7 +22,7 @@ export function readFlags(names: readonly string[], argv: readonly string[]): Fl
       options: Object.fromEntries(names.map((name) => [name, { type: 'string' as const }])),
       allowPositionals: true,
     });
-    return { values: values as Record<string, string | undefined>, rest: positionals };
+    return { values: values, rest: positionals };
   } catch (error) {
     return refuse([
       {

@@ -1,6 +1,6 @@
 import type { Appraisal } from '../../lib/index.ts';
 import { chooseReference, listenToStack, type ChooseReference } from '../drawing/listenToStack.ts';
-import { stack } from '../drawing/stack.ts';
+import { stack, stackOnPaper } from '../drawing/stack.ts';
 import { toDom } from '../drawing/toDom.ts';
 import { formLooks } from '../forms/formLook.ts';
 import { fixed } from '../format.ts';
@@ -85,19 +85,18 @@ export function arrangementSection(page: Sheet, store: StudyStore, cells: StudyC
       long: true,
       body: (v, room) => {
         const { site, options, standing, currency } = v.appraisal;
-        const drawing = toDom(
-          stack({
-            site,
-            options,
-            standing,
-            budget: budgetOf(v.brief),
-            currency,
-            reference: v.reference?.number ?? null,
-            widthPx: room.widthPx,
-            prefix: 'stack',
-          }),
-          document,
-        );
+        const input = {
+          site,
+          options,
+          standing,
+          budget: budgetOf(v.brief),
+          currency,
+          reference: v.reference?.number ?? null,
+          widthPx: room.widthPx,
+          prefix: 'stack',
+        };
+        if (room.isPaper) return stackOnPaper(input).map((part) => h('div', { class: 'part' }, part));
+        const drawing = toDom(stack(input), document);
         listenToStack(drawing);
         drawing.addEventListener(chooseReference, chosen);
         return [drawing, droppedTable(v.appraisal)];

@@ -10,6 +10,7 @@ import {
   sheet,
   studyShelf,
   studyStore,
+  undoKeys,
   type StudyShelf,
 } from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
@@ -61,7 +62,8 @@ const SAVE_AFTER_MS = 600;
 async function start(): Promise<void> {
   const cupboard = await deviceCupboard().catch(() => null);
   const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
-  const { id, study, revision, problem } = await opened(shelf);
+  const { study, problem, ...place } = await opened(shelf);
+  let { id, revision } = place;
 
   const graph = newGraph();
   const store = studyStore(graph, study, check);
@@ -79,10 +81,28 @@ async function start(): Promise<void> {
     const text = await openFile();
     if (text === null) return;
     const read = readStudy(text);
-    if (read.ok) store.open(read.value);
-    else
+    if (!read.ok) {
       saved.textContent = `Not opened, the study on the page is kept. ${read.problems.map(sentence).join(' ')}`;
+      return;
+    }
+    // A study from a file is another study: it never takes the place of the one that was on the page.
+    id = crypto.randomUUID();
+    revision = 0;
+    store.open(read.value);
   };
+  const undo = button('Undo', store.undo);
+  const redo = button('Redo', store.redo);
+  graph.watch(store.history, (state) => {
+    if (state.state !== 'ready') return;
+    for (const [element, word, what] of [
+      [undo, 'Undo', state.value.undo],
+      [redo, 'Redo', state.value.redo],
+    ] as const) {
+      element.toggleAttribute('disabled', what === null);
+      element.title = what === null ? `Nothing to ${word.toLowerCase()}` : `${word} ${what}`;
+    }
+  });
+  undoKeys(store);
 
   const { head, brief, books } = store.slices;
   page.mount(document.body, {
@@ -93,8 +113,8 @@ async function start(): Promise<void> {
       ],
       tools: [
         saved,
-        button('Undo', store.undo),
-        button('Redo', store.redo),
+        undo,
+        redo,
         button('Open', () => void openStudy()),
         button('Save as file', () => saveFile(fileName(whole()), writeStudy(whole()))),
         button('Print', () => print()),
@@ -134,16 +154,15 @@ async function start(): Promise<void> {
   });
   document.title = `${study.title} · Spanledger`;
 
-  let at = revision;
   let timer: ReturnType<typeof setTimeout> | undefined;
   const save = async (): Promise<void> => {
     if (shelf === null) return;
-    const result = await shelf.save(id, whole(), at);
+    const result = await shelf.save(id, whole(), revision);
     if (!result.ok) {
       saved.textContent = result.problems.map(sentence).join(' ');
       return;
     }
-    at = result.value.revision;
+    revision = result.value.revision;
     saved.textContent = savedWords(result.value.savedAt);
     history.replaceState(null, '', `?study=${encodeURIComponent(id)}`);
   };

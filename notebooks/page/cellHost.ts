@@ -11,6 +11,8 @@ import type { StationState } from '../drawing/stationLine.ts';
 /** The room a body has on the sheet. */
 export interface Room {
   readonly widthPx: number;
+  /** True on paper: a drawing higher than a page is given in parts. */
+  readonly isPaper: boolean;
 }
 
 /** A part that stands as it is, or one drawn anew from the values of the cells whenever they have changed. */
@@ -112,7 +114,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
 
   let state: State<Values<U>> = { state: 'pending' };
   let progress: Progress | undefined;
-  let drawn: { readonly values: Values<U>; readonly widthPx: number } | undefined;
+  let drawn: { readonly values: Values<U>; readonly room: Room } | undefined;
   let drawnAt: Date | undefined;
   let isOwed = false;
   let bodyError: unknown;
@@ -137,9 +139,11 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     const widthPx = paper?.widthPx ?? body.clientWidth;
     const values = 'value' in state ? state.value : undefined;
     if (values === undefined || widthPx === 0) return;
-    if (!isOwed && drawn?.values === values && drawn.widthPx === widthPx) return;
-    const room = { widthPx };
-    drawn = { values, widthPx };
+    const room = { widthPx, isPaper: paper !== null };
+    const isSame =
+      drawn?.values === values && drawn.room.widthPx === widthPx && drawn.room.isPaper === room.isPaper;
+    if (!isOwed && isSame) return;
+    drawn = { values, room };
     drawnAt = new Date();
     try {
       const whole = drawPart(body, spec.body, values, room);

@@ -134,7 +134,7 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
     lines.setPaper(isPaper);
     for (const host of hosts()) {
       const wide = host.element.classList.contains('wide');
-      host.setPaper(isPaper ? { widthPx: wide ? PAPER.wide : PAPER.body } : null);
+      host.setPaper(isPaper ? { widthPx: wide ? PAPER.wide : PAPER.body, isPaper } : null);
     }
     queue.flush();
   };
