@@ -42,7 +42,8 @@ export interface GuideForm {
   readonly depthM: DepthPair;
   readonly because: readonly string[];
   readonly sources: readonly string[];
-  readonly flip?: Flip;
+  /** The nearest change of one figure that changes the status, and what it becomes. */
+  readonly flip?: Flip & { readonly becomes: Status };
 }
 
 export interface Guide {
@@ -65,8 +66,12 @@ const middle = ([least, most]: Interval): number => Math.sqrt(least * most);
 /** Depths of a first answer, to 50 mm. */
 const rounded = (depthM: number): number => Math.max(0.05, Math.round(depthM * 20) / 20);
 
-/** Whether the side spans that the length leaves room for make a continuous unit. */
-function continuityOf(form: FormId, sideRoom: number): 'simple' | 'continuous' {
+/**
+ * Whether the side spans that the length leaves room for make a continuous unit.
+ *
+ * @param sideRoom room beside the span on either side, over the span
+ */
+export function continuityOf(form: FormId, sideRoom: number): 'simple' | 'continuous' {
   const least = endRatioWindow(form)?.[0];
   return least !== undefined && sideRoom >= least ? 'continuous' : 'simple';
 }
@@ -128,16 +133,16 @@ function outsideUsual(form: FormId, spanM: number): Pick<Ruling, 'because' | 'so
   };
 }
 
+const rulingsOn = (asked: readonly Rule[], facts: Facts): readonly Ruling[] =>
+  asked.map((entry) => rulingOf(entry, facts)).filter((ruling) => ruling !== null);
+
 function answer(form: FormId, task: GuideTask, widthM: number): GuideForm {
   const facts = factsOf(form, task, widthM);
   // What the question leaves open (method, supports, levels) is the arrangement's business, not the guide's.
   const asked: readonly Rule[] = rulesFor(form, ['form', 'arrangement']).filter(
     (entry) => verdictOf(entry, facts)?.template !== null,
   );
-  const rulings = asked
-    .map((entry) => rulingOf(entry, facts))
-    .filter((ruling) => ruling !== null)
-    .sort((a, b) => voices[a.effect] - voices[b.effect]);
+  const rulings = [...rulingsOn(asked, facts)].sort((a, b) => voices[a.effect] - voices[b.effect]);
   const spoken = rulings.some((ruling) => rule(ruling.rule).subject === 'span')
     ? rulings
     : [...rulings, outsideUsual(form, task.spanM)];
@@ -148,7 +153,9 @@ function answer(form: FormId, task: GuideTask, widthM: number): GuideForm {
     depthM: depthOf(form, task.spanM, widthM, facts.continuity === 'continuous' ? 'continuous' : 'simple'),
     because: spoken.flatMap(({ because }) => because),
     sources: [...new Set(spoken.map(({ source }) => source))],
-    ...(flip === undefined ? {} : { flip }),
+    ...(flip === undefined
+      ? {}
+      : { flip: { ...flip, becomes: statusOf(rulingsOn(asked, { ...facts, [flip.fact]: flip.to })) } }),
   };
 }
 

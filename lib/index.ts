@@ -6,11 +6,30 @@ export { formFacts } from './appraise/facts.ts';
 export { sizer, type Sizer } from './appraise/sizer.ts';
 export { workbench, type Workbench } from './appraise/workbench.ts';
 export { publishedBands, type BandColumn, type PublishedBand } from './bands/publishedBands.ts';
+export { figure, figurePaths, type Context as FigureContext } from './explain/index.ts';
 export { formModule, sizeableForms } from './forms/index.ts';
-export { guide, type Guide, type GuideForm } from './guide.ts';
+export {
+  builtBucket,
+  builtShares,
+  builtSpans,
+  type BuiltBucket,
+  type BuiltClass,
+  type BuiltSpans,
+} from './bands/builtSpans.ts';
+export { spanSources, type SpanSource } from './bands/spanSources.ts';
+export { depthGuidance, type DepthGuidance } from './depthGuidance.ts';
+export { guide, type Guide, type GuideForm, type GuideTask } from './guide.ts';
 export { sentence } from './messages/index.ts';
 export { drawDrivers, drawRates, ratePacks, ratesFor } from './price/index.ts';
-export { depthBand, endRatioWindow, spanWindow } from './rules/index.ts';
-export { constructionDepth, groundAt, roadLevelAt, soffitLimitAt, stretchAt, survey, waterDepthAt } from './site/index.ts';
+export { depthBand, endRatioWindow, source, spanWindow, type Source } from './rules/index.ts';
+export {
+  constructionDepth,
+  groundAt,
+  roadLevelAt,
+  soffitLimitAt,
+  stretchAt,
+  survey,
+  waterDepthAt,
+} from './site/index.ts';
 export { fingerprint, parseStudy, readStudy, writeStudy } from './study/index.ts';
 export { items } from './takeoff/index.ts';

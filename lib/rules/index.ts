@@ -1,4 +1,4 @@
-export { bibliography, factDictionary, rule, rules, rulesFor, source } from './book.ts';
+export { bibliography, fact, factDictionary, rule, rules, rulesFor, source } from './book.ts';
 export { evaluate, type Evaluated, type Truth } from './evaluate.ts';
 export { flip } from './flip.ts';
 export { cite, printed } from './reason.ts';
