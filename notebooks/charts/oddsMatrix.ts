@@ -16,10 +16,8 @@ export interface OddsMatrixInput extends OptionsInput {
   readonly unseparated: readonly [low: number, high: number];
 }
 
-const side = 38;
-
 /** Strokes at 45° along the foot of a square: not settled. */
-function footHatch(x: number, y: number): string {
+function footHatch(x: number, y: number, side: number): string {
   let d = '';
   for (let at = 2; at < side - 3; at += 4.2) {
     const long = Math.min(7, side - 3 - at);
@@ -34,10 +32,11 @@ function square(
   column: AppraisedOption,
   x: number,
   y: number,
+  side: number,
 ): Piece {
   if (row === column)
     return el('path', {
-      d: `M${num(x + 12)},${num(y + 26)}l14,-14`,
+      d: `M${num(x + side / 2 - 7)},${num(y + side / 2 + 7)}l14,-14`,
       stroke: colours.rule,
       'stroke-width': pens.fine,
     });
@@ -49,9 +48,10 @@ function square(
     {},
     settledCheaper &&
       el('rect', { x: x + 2, y: y + 2, width: side - 4, height: side - 4, fill: colours.grid }),
-    open && el('path', { d: footHatch(x, y), stroke: colours.rule, 'stroke-width': pens.fine, fill: 'none' }),
-    label(x + side / 2, y + 23, odds(share), {
-      size: letters.table,
+    open &&
+      el('path', { d: footHatch(x, y, side), stroke: colours.rule, 'stroke-width': pens.fine, fill: 'none' }),
+    label(x + side / 2, y + side / 2 + 4, odds(share), {
+      size: side < 34 ? letters.drawing : letters.table,
       anchor: 'middle',
       weight: settledCheaper ? 600 : 400,
       fill: settledCheaper || open ? colours.ink : colours.third,
@@ -70,6 +70,8 @@ export function oddsMatrix(input: OddsMatrixInput): Piece {
   );
   const left = 52;
   const top = 46;
+  // Smaller squares where the sheet is narrow; below 25 px they are pushed sideways instead.
+  const side = Math.min(38, Math.max(25, (input.widthPx - left - 4) / Math.max(1, options.length)));
   const end = options.length * side;
   const at = new Map(options.map((option, index) => [option.number, index]));
   const mark = (option: AppraisedOption, x: number, y: number): Piece => {
@@ -93,7 +95,7 @@ export function oddsMatrix(input: OddsMatrixInput): Piece {
     ),
     el('path', { d: grid, stroke: colours.grid, 'stroke-width': pens.thin, fill: 'none' }),
     options.map((row, i) =>
-      options.map((column, j) => square(input, row, column, left + j * side, top + i * side)),
+      options.map((column, j) => square(input, row, column, left + j * side, top + i * side, side)),
     ),
     standing.groups
       .map((group) => group.flatMap((number) => at.get(number) ?? []))

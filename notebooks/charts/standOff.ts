@@ -16,6 +16,7 @@ export function standOff(
   reference: number | null,
   right: number,
   limitY: number | null,
+  panel: { readonly top: number; readonly bottom: number },
 ): Map<number, { readonly x: number; readonly y: number; readonly flag: boolean }> {
   const out = new Map<number, { x: number; y: number; flag: boolean }>();
   const clusters: Place[][] = [];
@@ -56,11 +57,12 @@ export function standOff(
     let best: { x: number; ys: number[] } | null = null;
     let cost = Infinity;
     for (const x of most + 46 > right ? [least - 32] : [most + 32, most + 56, least - 32]) {
-      for (let shift = -72; shift <= 72; shift += 4) {
+      for (let shift = -120; shift <= 120; shift += 4) {
         const ys = rest.map((_, index) => middle + shift + (index - (rest.length - 1) / 2) * 24);
         const taken = [...out.values(), ...places];
         let here = Math.abs(shift) + Math.abs(x - most - 32) * 0.5;
         for (const y of ys) {
+          if (y < panel.top + 12 || y > panel.bottom - 12) here += 300;
           if (limitY !== null && Math.abs(y - limitY) < 13) here += 200;
           for (const other of taken) if (Math.hypot(other.x - x, other.y - y) < 22) here += 120;
         }

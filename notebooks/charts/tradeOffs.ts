@@ -107,7 +107,10 @@ function panel(
     x: axis.x(spread(option).p50),
     y: y(option.cost.p50),
   }));
-  const offs = standOff(places, input.reference, right, input.budget === null ? null : y(input.budget));
+  const offs = standOff(places, input.reference, right, input.budget === null ? null : y(input.budget), {
+    top,
+    bottom,
+  });
   const path = (run: readonly (readonly [number, number])[]): string =>
     run.length === 0 ? '' : `M${run.map(([a, b]) => `${num(a)},${num(b)}`).join('L')}`;
   let strokes = '';

@@ -112,7 +112,7 @@ export function crossing(input: CrossingInput): Piece {
   const dimensionBottom = dimensionTop + (several && !small ? 22 : 0);
   const structureY = option === null ? 24 : dimensionBottom + (small ? 10 : 18);
   const frame = frameOf(scale, shown, 0, { levelM: range.topM, y: structureY });
-  const bottomY = frame.y(range.bottomM) + (small ? 16 : 22);
+  const bottomY = frame.y(range.bottomM) + (small ? 30 : 22);
   const room: Room = {
     frame,
     accent: ink.accent,
@@ -140,7 +140,7 @@ export function crossing(input: CrossingInput): Piece {
     ? dataBand(site, option, frame, bottomY + 6, { accent: ink.accent, datumM: Math.floor(range.bottomM) })
     : null;
   const afterBand = bottomY + 6 + (band?.height ?? 0);
-  const height = afterBand + (withBar ? 42 : 4);
+  const height = afterBand + (withBar ? (width < 620 ? 56 : 42) : 4);
   const clip = `${prefix}-window`;
   const figureWidth = Math.max(...figures.map((figure) => textWidth(figure, letters.table)));
   const narrowest = Math.min(
@@ -194,6 +194,7 @@ export function crossing(input: CrossingInput): Piece {
       band?.piece,
       withBar &&
         scaleBar(scale, Math.max(frame.x(site.startM), 8), afterBand + 26, {
+          rightPx: width,
           widthPx: Math.min(400, width * 0.7),
         }),
       !withBand &&

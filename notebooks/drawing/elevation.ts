@@ -126,12 +126,13 @@ export function elevation(input: ElevationInput): Piece {
     input.prefix ?? `elevation-${String(option.number)}`,
   );
   const withBar = input.bar !== false;
-  const height = bottom + (withBar ? 44 : 6);
+  const height = bottom + (withBar ? (widthPx < 620 ? 58 : 44) : 6);
   return sheet(widthPx, height, `Elevation of ${optionWords(option)}, 1 to ${String(scale)}`, [
     ink.defs.length > 0 && el('defs', {}, ink.defs),
     elevationBody(site, option, frame, ink, range, { plain }),
     withBar &&
       scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 24, {
+        rightPx: widthPx,
         widthPx: Math.min(400, site.lengthM * ppm),
       }),
   ]);

@@ -21,6 +21,8 @@ const marks: Readonly<Record<Scale, readonly number[]>> = {
 export interface ScaleBarStyle {
   /** What was drawn, e.g. 'elevation'; stands before the scale. */
   readonly what?: string;
+  /** Right end of the sheet, px; words that would pass it stand under the bar. */
+  readonly rightPx?: number;
   /** Longest bar, px. */
   readonly widthPx?: number;
   /** Sections say nothing of heights. */
@@ -35,7 +37,7 @@ export function scaleBar(scale: Scale, x: number, y: number, style: ScaleBarStyl
   const end = places[places.length - 1] ?? 0;
   const words = `${style.what === undefined ? '' : `${style.what} `}1:${String(scale)} at A3${style.heights === false ? '' : ', heights not exaggerated'}`;
   const wordsX = x + end * ppm + textWidth(`${String(end)} m`, letters.drawing) + 24;
-  const inside = wordsX + textWidth(words, letters.drawing) <= x + room + 260;
+  const inside = wordsX + textWidth(words, letters.drawing) <= (style.rightPx ?? Infinity);
   return g(
     {},
     places.slice(1).map((to, index) => {
