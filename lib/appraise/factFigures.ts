@@ -7,9 +7,7 @@ import {
   type Facts,
   type Inputs,
 } from '../model/index.ts';
-import { factDictionary, printed, rule, withRatios, type Fact } from '../rules/index.ts';
-import { factsIn } from '../rules/limitsOn.ts';
-import { wholeCondition } from '../rules/verdictOf.ts';
+import { factDictionary, withRatios, type Fact } from '../rules/index.ts';
 import { optionFacts } from './facts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
 
@@ -73,9 +71,9 @@ const fact = <const I extends Inputs>(
     ...(compute === undefined ? {} : { compute }),
   });
 
-const asIs = <const I extends Inputs>(
+const asIs = (
   id: string,
-  inputs: (at: At) => I,
+  inputs: (at: At) => Readonly<Record<string, string>>,
   formula = factOf(id).meaning,
 ): Descriptor => fact(id, formula, inputs, (v) => Object.values(v)[0] as number);
 
@@ -238,6 +236,15 @@ export const factFigures: readonly Descriptor[] = [
     spare: `${at.root}/headroom${at.option.headroom === null ? '' : '/spareM'}`,
   })),
   ...(['trussHeightM', 'pylonHeightM', 'boxInnerHeightM'] as const).map((id) => asIs(id, designFigure(id))),
+  {
+    ...fact(
+      'pylonHeightRatio',
+      'height of the pylon / twice the main span: one pylon reaches as far as half a span between two',
+      (at) => ({ height: `${at.root}/facts/pylonHeightM`, main: `${at.root}/facts/mainSpanM` }),
+      ({ height, main: span }) => height / (2 * span),
+    ),
+    when: (at) => mainUnit(at.option.units).pylons?.length === 1,
+  },
   ...ratios,
   described({
     path: 'options/:option/facts/:fact',
@@ -246,64 +253,5 @@ export const factFigures: readonly Descriptor[] = [
     method: 'fact for the rules',
     formula: 'not known for this form',
     value: (at) => factsOf(at)[at.name('fact')] ?? 'unknown',
-  }),
-];
-
-const ruleOf = (at: At) => rule(at.name('rule'));
-const rulingOf = (at: At) => at.option.rulings.find((ruling) => ruling.rule === at.name('rule'))!;
-const ruleFacts = (at: At): string[] =>
-  [...new Set(factsIn(wholeCondition(ruleOf(at))))].map((id) => `${at.root}/facts/${id}`);
-const flipFact = (at: At): Fact => factOf(rulingOf(at).flip!.fact);
-
-/** What the rules say of an option. */
-export const rulingFigures: readonly Descriptor[] = [
-  described({
-    path: 'options/:option/rulings/:rule/effect',
-    label: (at) => ruleOf(at).title,
-    unit: '',
-    method: 'rule',
-    formula: (at) => rulingOf(at).because.join('; '),
-    inputs: (at) => ({ facts: ruleFacts(at) }),
-    sources: (at) => ruleOf(at).sources,
-  }),
-  described({
-    path: 'options/:option/rulings/:rule/flip/from',
-    label: (at) => `${flipFact(at).label}, as it is`,
-    unit: (at) => rulingOf(at).flip!.unit,
-    method: 'fact for the rules',
-    formula: (at) => printed(flipFact(at), rulingOf(at).flip!.from),
-    inputs: (at) => ({ fact: `${at.root}/facts/${rulingOf(at).flip!.fact}` }),
-    compute: (v) => v.fact,
-  }),
-  described({
-    path: 'options/:option/rulings/:rule/flip/to',
-    label: (at) => `${flipFact(at).label} that would turn the ruling`,
-    unit: (at) => rulingOf(at).flip!.unit,
-    method: 'nearest limit of the rule',
-    formula: (at) => `${ruleOf(at).title}: first step past the limit, everything else as it is`,
-    inputs: (at) => ({ facts: ruleFacts(at) }),
-    sources: (at) => ruleOf(at).sources,
-  }),
-  described({
-    path: 'options/:option/status',
-    label: (at) => `status of option ${at.option.number}`,
-    unit: '',
-    method: 'rules',
-    formula: 'out: any rule puts it out; in: inside its usual span band and no caution; else possible',
-    inputs: (at) => ({ rulings: at.option.rulings.map(({ rule: id }) => `${at.root}/rulings/${id}/effect`) }),
-  }),
-  described({
-    path: 'droppedCounts/:i/count',
-    label: (at) => {
-      const { form, reason } = at.appraisal.droppedCounts[at.index('i')]!;
-      return `arrangements of ${form} not kept: ${reason}`;
-    },
-    unit: 'no',
-    method: 'count',
-    formula: (at) => at.appraisal.droppedCounts[at.index('i')]!.reason,
-    inputs: (at) => {
-      const { form } = at.appraisal.droppedCounts[at.index('i')]!;
-      return { length: 'site/lengthM', span: [`windows/${form}/span/least`, `windows/${form}/span/most`] };
-    },
   }),
 ];

@@ -1,9 +1,9 @@
-import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { mkdirSync, writeFileSync } from 'node:fs';
 import { resolve } from 'node:path';
 import { appraise } from '../appraise.ts';
-import { readStudy } from '../study/index.ts';
 import { appraisalJson } from './appraisalJson.ts';
 import { readFlags, refuse } from './flags.ts';
+import { studyFile } from './studyFile.ts';
 
 const flags = readFlags(['out', 'format'], process.argv.slice(2));
 const [file] = flags.rest;
@@ -31,24 +31,8 @@ if (format !== 'json') {
   ]);
 }
 
-let text: string;
-try {
-  text = readFileSync(file, 'utf8');
-} catch (error) {
-  refuse([
-    {
-      code: 'missing',
-      path: [file],
-      expected: 'a study file that can be read',
-      received: error instanceof Error ? error.message : String(error),
-      remedy: 'check the path',
-    },
-  ]);
-}
-const read = readStudy(text);
-if (!read.ok) refuse(read.problems);
-
-const json = `${JSON.stringify(appraisalJson(appraise(read.value)), null, 2)}\n`;
+const study = studyFile(file);
+const json = `${JSON.stringify(appraisalJson(appraise(study)), null, 2)}\n`;
 const out = flags.values['out'];
 if (out === undefined) {
   process.stdout.write(json);

@@ -87,7 +87,9 @@ function valueOf(state: Asked, asked: string): FigureValue {
   const { path, descriptor, at } = place;
   const known = state.values.get(path);
   if (known !== undefined) return known;
-  const value = descriptor.value?.(at) ?? heldAt(state.context, path) ?? compute(state, place);
+  // An unknown is held as null in places: only what is not there at all is worked out.
+  const held = descriptor.value === undefined ? heldAt(state.context, path) : descriptor.value(at);
+  const value = held === undefined ? compute(state, place) : held;
   if (value === undefined) throw new RangeError(`path: expected a figure of the study, received '${path}'`);
   state.values.set(path, value);
   return value;
@@ -166,6 +168,9 @@ export function figure(context: Context, path: string | readonly (string | numbe
       inputs: inputPaths(place).map((input) => inputOf(state, input)),
       sources: told(descriptor.sources ?? [], at).map(sourceOf),
     },
-    usedBy: chartOf(state).uses.get(place.path) ?? [],
+    // Looked up when it is read: it takes a walk over every figure once.
+    get usedBy() {
+      return chartOf(state).uses.get(place.path) ?? [];
+    },
   };
 }

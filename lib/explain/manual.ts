@@ -1,14 +1,20 @@
-import { factFigures, rulingFigures } from '../appraise/factFigures.ts';
+import { factFigures } from '../appraise/factFigures.ts';
+import { headroomFigures } from '../appraise/headroomFigures.ts';
 import { roadFigures } from '../appraise/roadFigures.ts';
+import { rulingFigures } from '../appraise/rulingFigures.ts';
 import { arrangementFigures } from '../arrange/figures.ts';
 import { standingFigures } from '../decide/figures.ts';
+import { cableFigures } from '../forms/cable-stayed/figures.ts';
 import { compositeFigures } from '../forms/composite-i/figures.ts';
+import { boxFigures } from '../forms/concrete-box/figures.ts';
 import { designFigures } from '../forms/figures.ts';
+import { floorPractice } from '../forms/floor/floorFigures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
 import { priceFigures } from '../price/figures.ts';
 import { programmeFigures } from '../programme/figures.ts';
 import { windowFigures } from '../rules/figures.ts';
+import { deckFigures } from '../site/deckFigures.ts';
 import { siteFigures } from '../site/figures.ts';
 import { studyFigures } from '../study/figures.ts';
 import { articulationFigures } from '../substructure/articulationFigures.ts';
@@ -17,27 +23,34 @@ import { foundationFigures } from '../substructure/foundationFigures.ts';
 import { shaftFigures } from '../substructure/shaftFigures.ts';
 import { supportFigures } from '../substructure/supportFigures.ts';
 import { wallLineFigures } from '../substructure/wallLineFigures.ts';
-import { takeOffFigures } from '../takeoff/figures.ts';
+import { lineFigures } from '../takeoff/lineFigures.ts';
+import { quantityFigures } from '../takeoff/quantityFigures.ts';
 import { dataFigures } from './dataFigures.ts';
 
 /** Every descriptor of the tool, stage by stage from the brief to the standing. */
 export const manual: readonly Descriptor[] = [
   ...studyFigures,
   ...siteFigures,
+  ...deckFigures,
   ...windowFigures,
   ...arrangementFigures,
   // A form speaks for its own figures first.
   ...compositeFigures,
+  ...boxFigures,
   ...trussFigures,
+  ...cableFigures,
+  ...floorPractice,
   ...designFigures,
   ...roadFigures,
+  ...headroomFigures,
   ...supportFigures,
   ...articulationFigures,
   ...shaftFigures,
   ...foundationFigures,
   ...wallLineFigures,
   ...footLineFigures,
-  ...takeOffFigures,
+  ...lineFigures,
+  ...quantityFigures,
   ...programmeFigures,
   ...priceFigures,
   ...factFigures,

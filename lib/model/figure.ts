@@ -106,3 +106,23 @@ export type Descriptor = Described<Inputs>;
 export function described<const I extends Inputs>(descriptor: Described<I>): Descriptor {
   return descriptor as unknown as Descriptor;
 }
+
+/** A figure of practice that stands in the code beside what uses it; `name` is its place under `practice`. */
+export function practice(
+  name: string,
+  value: number,
+  label: string,
+  unit: string,
+  source: string,
+): Descriptor {
+  return {
+    path: `practice/${name}`,
+    label,
+    unit,
+    kind: 'preset',
+    method: 'figure of practice',
+    formula: 'taken as it is',
+    value: () => value,
+    sources: [source],
+  };
+}

@@ -21,10 +21,15 @@ function ratesOf(at: At): Rates {
 }
 
 const money = (at: At): string => at.study.books.currency;
-const itemWords = (at: At): string => itemOf(at.name('item')).label;
+/** Words of an item as they stand inside a line of text. */
+const inText = (label: string): string => label.charAt(0).toLowerCase() + label.slice(1);
+const itemWords = (at: At): string => inText(itemOf(at.name('item')).label);
 const perUnit = (at: At): string => `${money(at)}/${itemOf(at.name('item')).unit}`;
 const typedRate = (at: At) => at.study.books.rates.find(({ item }) => item === at.name('item'));
-const rateOf = (at: At): Spread => ratesOf(at).rates.find(({ item }) => item === at.name('item'))!;
+const rateOf = (at: At): Spread => {
+  const { p10, p50, p90 } = ratesOf(at).rates.find(({ item }) => item === at.name('item'))!;
+  return { p10, p50, p90 };
+};
 
 const pointWords: Readonly<Record<string, string>> = { p10: '10 % point', p50: 'median', p90: '90 % point' };
 const point = (at: At): keyof Spread => at.name('point') as keyof Spread;
@@ -75,7 +80,7 @@ const draw = (at: At): string => at.study.books.draws.toLocaleString('en').repla
 const lineMoney = (path: string, lineAt: (at: At) => MeasuredLine): Descriptor =>
   described({
     path,
-    label: (at) => `${lineAt(at).what}, ${itemOf(lineAt(at).item).label.toLowerCase()}`,
+    label: (at) => `${lineAt(at).what}, ${inText(itemOf(lineAt(at).item).label)}`,
     unit: money,
     method: 'product',
     formula: 'quantity x mean rate',

@@ -1,8 +1,4 @@
-import { described, type At, type Descriptor, type StripKind } from '../model/index.ts';
-import { CROSSFALL } from './constructionDepth.ts';
-import { BARRIER_LINE_KN_M, carriage, FOOTWAY_KN_M2, raised, railed, SURFACING_KN_M3 } from './deckSpec.ts';
-
-const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
+import { described, type At, type Descriptor } from '../model/index.ts';
 
 /** A figure of the site that is one of the brief, read on. */
 const copied = (path: string, from: (at: At) => string, label: string, unit = ''): Descriptor =>
@@ -15,34 +11,6 @@ const copied = (path: string, from: (at: At) => string, label: string, unit = ''
     inputs: (at) => ({ given: from(at) }),
     compute: ({ given }) => given,
   });
-
-/** A figure of practice written in the code of the site. */
-const practice = (name: string, value: number, label: string, unit: string, source: string): Descriptor =>
-  described({
-    path: `practice/site/${name}`,
-    label,
-    unit,
-    kind: 'preset',
-    method: 'figure of practice',
-    formula: 'taken as it is',
-    value: () => value,
-    sources: [source],
-  });
-
-const strips = (at: At, kinds?: ReadonlySet<StripKind>): string[] =>
-  at.study.brief.deck.flatMap((strip, i) =>
-    kinds === undefined || kinds.has(strip.kind) ? [`brief/deck/${i}/widthM`] : [],
-  );
-
-/** Strips from the left edge to the first and to the last lane or shoulder. */
-function toCarriageway(at: At): { readonly left: string[]; readonly inside: string[] } {
-  const { deck } = at.study.brief;
-  const first = deck.findIndex((strip) => carriage.has(strip.kind));
-  const last = deck.findLastIndex((strip) => carriage.has(strip.kind));
-  const widths = (from: number, to: number): string[] =>
-    deck.slice(from, to).map((_, i) => `brief/deck/${from + i}/widthM`);
-  return { left: widths(0, first), inside: widths(first, last + 1) };
-}
 
 /** Where the brief says what a soffit limit is measured from: a clearance, or else a flood. */
 function limitBehind(
@@ -174,70 +142,6 @@ export const siteFigures: readonly Descriptor[] = [
   copied('site/road/maxGradient', () => 'brief/road/maxGradient', 'steepest gradient'),
   copied('site/road/fillSideSlope', () => 'brief/road/fillSideSlope', 'side slope of fill'),
   described({
-    path: 'site/deck/widthM',
-    label: 'deck width',
-    unit: 'm',
-    method: 'sum',
-    formula: 'sum of the strips',
-    inputs: (at) => ({ all: strips(at) }),
-    compute: ({ all }) => sum(all),
-  }),
-  described({
-    path: 'site/deck/carriagewayM',
-    label: 'width between kerbs',
-    unit: 'm',
-    method: 'sum',
-    formula: 'lanes + shoulders',
-    inputs: (at) => ({ road: strips(at, carriage) }),
-    compute: ({ road }) => sum(road),
-  }),
-  described({
-    path: 'site/deck/carriagewayOffsetM',
-    label: 'middle of the carriageway from the middle of the deck',
-    unit: 'm',
-    method: 'difference',
-    formula: 'strips left of it + half its stretch - half the deck width',
-    inputs: (at) => ({ ...toCarriageway(at), width: 'site/deck/widthM' }),
-    compute: ({ left, inside, width }) => (inside.length > 0 ? sum(left) + sum(inside) / 2 - width / 2 : 0),
-  }),
-  described({
-    path: 'site/deck/lanes',
-    label: 'marked lanes',
-    unit: 'no',
-    method: 'count',
-    formula: 'strips that are lanes',
-    inputs: (at) => ({ lanes: strips(at, new Set<StripKind>(['lane'])) }),
-    compute: ({ lanes }) => lanes.length,
-  }),
-  described({
-    path: 'site/deck/footwayM',
-    label: 'width of footways',
-    unit: 'm',
-    method: 'sum',
-    formula: 'strips that are footways',
-    inputs: (at) => ({ footways: strips(at, new Set<StripKind>(['footway'])) }),
-    compute: ({ footways }) => sum(footways),
-  }),
-  copied('site/deck/surfacingM', () => 'brief/surfacingM', 'surfacing', 'm'),
-  described({
-    path: 'site/deck/superimposedKNm',
-    label: 'superimposed dead load',
-    unit: 'kN/m',
-    method: 'sum of products',
-    formula:
-      'surfacing x its weight x width between kerbs + footways and verges x their build-up + barrier lines x their weight',
-    inputs: (at) => ({
-      surfacing: 'site/deck/surfacingM',
-      weight: `practice/site/surfacing-${at.appraisal.site.standard}`,
-      road: 'site/deck/carriagewayM',
-      raised: strips(at, raised),
-      build: 'practice/site/footway',
-      railed: strips(at, railed),
-      line: 'practice/site/barrier',
-    }),
-    compute: (v) => v.surfacing * v.weight * v.road + v.build * sum(v.raised) + v.line * v.railed.length,
-  }),
-  described({
     path: 'site/planRadiusM',
     label: 'plan radius',
     unit: 'm',
@@ -273,21 +177,4 @@ export const siteFigures: readonly Descriptor[] = [
     inputs: () => ({ to: 'site/mainOpening/toM', from: 'site/mainOpening/fromM' }),
     compute: ({ to, from }) => to - from,
   }),
-  practice(
-    'surfacing-lm1',
-    SURFACING_KN_M3.lm1,
-    'weight of surfacing',
-    'kN/m3',
-    'EN 1991-1-1 table A.6 (from memory)',
-  ),
-  practice(
-    'surfacing-hl93',
-    SURFACING_KN_M3.hl93,
-    'weight of surfacing',
-    'kN/m3',
-    'AASHTO LRFD table 3.5.1-1 (from memory)',
-  ),
-  practice('footway', FOOTWAY_KN_M2, 'build-up of footways and verges', 'kN/m2', 'common-practice'),
-  practice('barrier', BARRIER_LINE_KN_M, 'barrier or parapet with its plinth', 'kN/m', 'common-practice'),
-  practice('crossfall', CROSSFALL, 'crossfall of the carriageway to both sides', '', 'common-practice'),
 ];

@@ -51,7 +51,7 @@ export interface Floor {
 }
 
 /** Room below the slab that a cross-girder is sized in when the floor leaves less; the depth check then shows it. */
-const leastSteelM = 0.3;
+export const leastSteelM = 0.3;
 
 /**
  * Sizes slab, stringers and cross-girders of a floor as simple composite beams. Cross-girders take the standard's

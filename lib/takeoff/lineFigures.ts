@@ -1,20 +1,5 @@
 import { described, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
 import { itemOf } from './items.ts';
-import { perM2, splitQuantities } from './quantitiesOf.ts';
-
-const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
-
-type Material = keyof ReturnType<typeof perM2>;
-const materialWords: Readonly<Record<Material, readonly [label: string, unit: string]>> = {
-  concreteM3: ['concrete', 'm3'],
-  reinforcementKg: ['reinforcing bars', 'kg'],
-  prestressKg: ['prestressing strand', 'kg'],
-  structuralSteelKg: ['structural steel', 'kg'],
-  stayCableKg: ['stay cables', 'kg'],
-  mainCableKg: ['main cables', 'kg'],
-};
-const materialOf = (at: At): Material => at.name('material') as Material;
-const words = (at: At): readonly [label: string, unit: string] => materialWords[materialOf(at)];
 
 /** Where a line of an option was measured first: a unit, a support, or the crossing itself. */
 type Origin = { readonly path: string } | { readonly crossing: string };
@@ -47,33 +32,6 @@ const isItem =
   (item: string) =>
   (at: At): boolean =>
     crossing(() => true)(at) && lineOf(at).item === item;
-
-/** Lines of one material, of the superstructure or of what carries it, as `splitQuantities` parts them. */
-function linesOf(
-  at: At,
-  part: 'superstructure' | 'supports',
-): { readonly whole: string[]; readonly likely: string[]; readonly odds: string[] } {
-  const material = materialOf(at);
-  const counts = (line: MeasuredLine): boolean =>
-    itemOf(line.item).material === material &&
-    splitQuantities([{ ...line, quantity: 1 }])[part][material] > 0;
-  const whole = at.option.lines.flatMap((line, i) =>
-    counts(line) ? [`${at.root}/lines/${i}/quantity`] : [],
-  );
-  const likely: string[] = [];
-  const odds: string[] = [];
-  for (const [s, support] of at.option.supports.entries()) {
-    for (const [f, foundation] of support.foundations.entries()) {
-      const foot = `${at.root}/supports/${s}/foundations/${f}`;
-      for (const [i, line] of foundation.lines.entries()) {
-        if (!counts(line)) continue;
-        likely.push(`${foot}/lines/${i}/quantity`);
-        odds.push(`${foot}/odds`);
-      }
-    }
-  }
-  return { whole, likely, odds };
-}
 
 /** What the possessions of a railway hang on: the method of the unit above it, its pieces, and the railway itself. */
 function possession(at: At) {
@@ -126,8 +84,8 @@ const approach = (end: 'start' | 'end'): Descriptor =>
     },
   });
 
-/** Quantities: lines of the take-off, and what they add up to. */
-export const takeOffFigures: readonly Descriptor[] = [
+/** Lines of the take-off: where each was measured, and what the crossing itself asks for. */
+export const lineFigures: readonly Descriptor[] = [
   described({
     path: 'options/:option/designs/:unit/lines/:line/quantity',
     label: (at) => at.design.lines[at.index('line')]!.what,
@@ -233,33 +191,5 @@ export const takeOffFigures: readonly Descriptor[] = [
     formula: 'likely months on site',
     inputs: (at) => ({ months: `${at.root}/months/p50` }),
     compute: ({ months }) => months,
-  }),
-  described({
-    path: 'options/:option/quantities/:material',
-    label: (at) => `${words(at)[0]} of the superstructure`,
-    unit: (at) => words(at)[1],
-    method: 'sum',
-    formula: 'lines of this material but those of pylons, piers, abutments, foundations and river works',
-    inputs: (at) => ({ lines: linesOf(at, 'superstructure').whole }),
-    compute: ({ lines }) => sum(lines),
-  }),
-  described({
-    path: 'options/:option/supportQuantities/:material',
-    label: (at) => `${words(at)[0]} of supports and foundations`,
-    unit: (at) => words(at)[1],
-    method: 'sum weighed by odds',
-    formula:
-      'lines of this material in pylons, piers, abutments + lines of each foundation x odds of its ground',
-    inputs: (at) => linesOf(at, 'supports'),
-    compute: ({ whole, likely, odds }) => sum(whole) + sum(likely.map((quantity, i) => quantity * odds[i]!)),
-  }),
-  described({
-    path: 'options/:option/perM2/:material',
-    label: (at) => `${words(at)[0]} per m2 of deck`,
-    unit: (at) => `${words(at)[1]}/m2`,
-    method: 'ratio',
-    formula: 'quantity of the superstructure / deck area',
-    inputs: (at) => ({ quantity: `${at.root}/quantities/${materialOf(at)}`, area: `${at.root}/deckAreaM2` }),
-    compute: ({ quantity, area }) => quantity / area,
   }),
 ];

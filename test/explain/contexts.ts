@@ -1,0 +1,57 @@
+import { appraise, type Study } from '../../lib/index.ts';
+import type { Context } from '../../lib/explain/index.ts';
+import { lowFerry } from '../appraise/studies.ts';
+
+const made = new Map<string, Context>();
+
+/** A study with its appraisal, made once for all tests that ask about it. */
+function once(name: string, study: () => Study): Context {
+  const found = made.get(name);
+  if (found) return found;
+  const asked = study();
+  const context = { study: asked, appraisal: appraise(asked) };
+  made.set(name, context);
+  return context;
+}
+
+/** The first worked example with all its options. */
+export const example = (): Context => once('example', lowFerry);
+
+/**
+ * The same crossing seen differently: American loading, much of the brief unknown, a rate typed over the schedule, both
+ * ends of the road free, and one option whose piers and depth were set by hand.
+ */
+export const otherwise = (): Context =>
+  once('otherwise', () => {
+    const study = lowFerry();
+    const { brief } = study;
+    return {
+      ...study,
+      brief: {
+        ...brief,
+        loading: 'hl93',
+        crossing: { ...brief.crossing, planRadiusM: 'unknown', skewDeg: 'unknown' },
+        road: { ...brief.road, fixedEnd: 'none' },
+        waters: brief.waters.map((water) => ({ ...water, floodLevelM: 'unknown' })),
+        budget: 'unknown',
+      },
+      books: {
+        ...study.books,
+        draws: 1000,
+        rates: [{ item: 'plate-girder-steel', p10: 3, p50: 3.9, p90: 5.2, reason: 'call to a fabricator' }],
+      },
+      options: {
+        ...study.options,
+        forms: ['composite-i'],
+        kept: [
+          {
+            number: 40,
+            form: 'composite-i',
+            method: 'crane',
+            units: [{ form: 'composite-i', role: 'main', supportsM: [1240, 1280, 1321, 1389, 1430, 1470] }],
+            depthM: 2.6,
+          },
+        ],
+      },
+    };
+  });

@@ -1,0 +1,143 @@
+import { describe, expect, it } from 'vitest';
+import { figure, figurePaths, rebuilt, type Context } from '../../lib/explain/index.ts';
+import { bibliography } from '../../lib/rules/index.ts';
+import { example, otherwise } from './contexts.ts';
+
+const contexts: readonly (readonly [name: string, context: () => Context])[] = [
+  ['the worked example', example],
+  ['the crossing seen otherwise', otherwise],
+];
+
+/** What holds a number that is not a figure: names of options, units, supports and stretches, and what is drawn. */
+const notFigures =
+  /\/(number|unit|support|stretch|pylons\/\d+|groups\/\d+\/\d+)$|\/(elevation|sections|depthAlong)\//u;
+
+/** Paths of all numbers of a result, lists of options, parts, rulings and checks by the names of their entries. */
+function numbersIn(value: unknown, path: string, by?: string): string[] {
+  if (typeof value === 'number') return [path];
+  if (typeof value !== 'object' || value === null) return [];
+  const names: Readonly<Record<string, string>> = { parts: 'part', rulings: 'rule', checks: 'id' };
+  return Object.entries(value).flatMap(([key, one]: [string, unknown]) => {
+    const name = by === undefined ? key : String((one as Record<string, unknown>)[by]);
+    return numbersIn(
+      one,
+      `${path}/${name}`,
+      names[key] !== undefined && Array.isArray(one) ? names[key] : undefined,
+    );
+  });
+}
+
+const relative = (a: number, b: number): number => Math.abs(a - b) / Math.max(Math.abs(a), Math.abs(b), 1e-9);
+
+describe.each(contexts)('explanations of %s', (_name, asked) => {
+  it('figure(path) stands behind every number of the appraisal', { timeout: 60_000 }, () => {
+    const { study, appraisal } = asked();
+    const known = new Set(figurePaths(asked()));
+    const numbers = [
+      ...numbersIn(appraisal.site, 'site'),
+      ...appraisal.options.flatMap((option) => numbersIn(option, `options/${option.number}`)),
+      ...numbersIn(appraisal.standing.odds, 'standing/odds'),
+      ...numbersIn(appraisal.standing.within, 'standing/within'),
+      ...numbersIn(appraisal.droppedCounts, 'droppedCounts'),
+      ...numbersIn(study.brief, 'brief'),
+      ...numbersIn({ draws: study.books.draws, seed: study.books.seed }, 'books'),
+    ];
+    expect(numbers.length).toBeGreaterThan(1000);
+    expect(numbers.filter((path) => !known.has(path) && !notFigures.test(path))).toEqual([]);
+  });
+
+  it('rebuilt(path) is the figure wherever its formula is closed, from its stated inputs alone', () => {
+    const context = asked();
+    let closed = 0;
+    const wrong = figurePaths(context).flatMap((path) => {
+      const { value } = figure(context, path);
+      if (typeof value !== 'number') return [];
+      const again = rebuilt(context, path);
+      if (again === undefined) return [];
+      closed += 1;
+      return relative(again, value) <= 1e-9 ? [] : [`${path}: ${value}, from its inputs ${again}`];
+    });
+    expect(wrong).toEqual([]);
+    expect(closed).toBeGreaterThan(1000);
+  });
+
+  it('figure(path).because.inputs can each be asked in turn and say the same value there', () => {
+    const context = asked();
+    for (const path of figurePaths(context)) {
+      for (const input of figure(context, path).because.inputs) {
+        const own = figure(context, input.path);
+        expect([own.value, own.unit, own.kind, own.label]).toEqual([
+          input.value,
+          input.unit,
+          input.kind,
+          input.label,
+        ]);
+      }
+    }
+  });
+
+  it('figure(path) never comes round to itself', () => {
+    const context = asked();
+    const done = new Set<string>();
+    const open = new Set<string>();
+    const circles: string[] = [];
+    const visit = (path: string): void => {
+      if (done.has(path)) return;
+      if (open.has(path)) {
+        circles.push([...open, path].join(' <- '));
+        return;
+      }
+      open.add(path);
+      for (const input of figure(context, path).because.inputs) visit(input.path);
+      open.delete(path);
+      done.add(path);
+    };
+    figurePaths(context).forEach(visit);
+    expect(circles).toEqual([]);
+  });
+
+  it('figure(path) ends at what is typed, preset or unknown, or says why nothing stands behind it', () => {
+    const context = asked();
+    const ends = figurePaths(context)
+      .map((path) => figure(context, path))
+      .filter(({ because }) => because.inputs.length === 0);
+    const silent = ends.filter(
+      ({ kind, because }) =>
+        kind === 'computed' &&
+        !/once|no limit|no joint|measured with|by definition|none is measured/u.test(
+          `${because.method} ${because.formula}`,
+        ),
+    );
+    expect(ends.length).toBeGreaterThan(100);
+    expect(silent.map(({ path }) => path)).toEqual([]);
+  });
+
+  it('figure(path).because.sources are entries of the bibliography or say what they are', () => {
+    const context = asked();
+    const ids = new Set(bibliography.map(({ id }) => id));
+    const provenance =
+      /from memory|no source|invented|\bread\b|\bseen\b|worked out|statics|by definition|preset|assumed|Rankine|judgement|common practice|^[\d\s.*/+()-]+$/iu;
+    const cited = figurePaths(context).flatMap((path) => figure(context, path).because.sources);
+    expect(cited.length).toBeGreaterThan(100);
+    expect(cited.filter(({ id, text }) => (id === null ? !provenance.test(text) : !ids.has(id)))).toEqual([]);
+  });
+
+  it('figure(path) of a sized form speaks in its own words', () => {
+    const context = asked();
+    const unsaid = figurePaths(context).filter((path) => {
+      const { formula } = figure(context, path).because;
+      return /its unit stands at the end of its name|^(demand|capacity) of the check '/u.test(formula);
+    });
+    expect(unsaid).toEqual([]);
+  });
+
+  it('figure(path).usedBy is the other end of because.inputs', () => {
+    const context = asked();
+    for (const path of figurePaths(context).filter((_, i) => i % 7 === 0)) {
+      for (const { path: input } of figure(context, path).because.inputs)
+        expect(figure(context, input).usedBy).toContain(path);
+      for (const user of figure(context, path).usedBy)
+        expect(figure(context, user).because.inputs.map((input) => input.path)).toContain(path);
+    }
+  });
+});
