@@ -23,6 +23,7 @@ export { sentence } from './messages/index.ts';
 export { drawDrivers, drawRates, ratePacks, ratesFor } from './price/index.ts';
 export { depthBand, endRatioWindow, source, spanWindow, type Source } from './rules/index.ts';
 export {
+  CROSSFALL,
   constructionDepth,
   groundAt,
   roadLevelAt,
@@ -31,5 +32,5 @@ export {
   survey,
   waterDepthAt,
 } from './site/index.ts';
-export { fingerprint, parseStudy, readStudy, writeStudy } from './study/index.ts';
+export { fillGround, fingerprint, groundLabels, parseStudy, readStudy, writeStudy } from './study/index.ts';
 export { items } from './takeoff/index.ts';

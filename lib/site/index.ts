@@ -1,5 +1,5 @@
 export { addedFill } from './addedFill.ts';
-export { constructionDepth } from './constructionDepth.ts';
+export { CROSSFALL, constructionDepth } from './constructionDepth.ts';
 export { deckSpec } from './deckSpec.ts';
 export { groundAt, soffitLimitAt, stretchAt, waterDepthAt } from './lookups.ts';
 export type { DepthAlong } from './depthAlong.ts';
