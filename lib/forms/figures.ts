@@ -214,7 +214,9 @@ export const designFigures: readonly Descriptor[] = [
     formula: 'that of the main unit; of an approach only where it fails and is worse',
     inputs: (at) => ({
       main: `${mainOf(at)}/limitingCheck/utilisation`,
-      others: at.option.designs.map((_, i) => `${at.root}/designs/${i}/limitingCheck/utilisation`),
+      others: at.option.designs.flatMap((_, i) =>
+        mainOf(at).endsWith(`/${i}`) ? [] : [`${at.root}/designs/${i}/limitingCheck/utilisation`],
+      ),
     }),
     compute: ({ main, others }) => others.reduce((most, one) => (one > Math.max(1, most) ? one : most), main),
   }),

@@ -20,6 +20,8 @@ function ratesOf(at: At): Rates {
   return found;
 }
 
+const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
+
 const money = (at: At): string => at.study.books.currency;
 /** Words of an item as they stand inside a line of text. */
 const inText = (label: string): string => label.charAt(0).toLowerCase() + label.slice(1);
@@ -35,25 +37,35 @@ const pointWords: Readonly<Record<string, string>> = { p10: '10 % point', p50: '
 const point = (at: At): keyof Spread => at.name('point') as keyof Spread;
 const percent = (at: At): string => `P${at.name('point').slice(1)}`;
 
-/** Lines of one part of the bill: those of the option and, weighed by nothing yet, those of its foundations. */
-export function linesOfPart(
-  at: At,
-  part: BillPart,
-): { readonly lines: string[]; readonly foundations: string[]; readonly odds: string[] } {
-  const isPart = (line: MeasuredLine): boolean => line.part === part;
-  const lines = at.option.lines.flatMap((line, i) => (isPart(line) ? [`${at.root}/lines/${i}`] : []));
-  const foundations: string[] = [];
-  const odds: string[] = [];
-  at.option.supports.forEach((support, s) => {
-    support.foundations.forEach((foundation, f) => {
-      foundation.lines.forEach((line, i) => {
-        if (!isPart(line)) return;
-        foundations.push(`${at.root}/supports/${s}/foundations/${f}/lines/${i}`);
-        odds.push(`${at.root}/supports/${s}/foundations/${f}/odds`);
-      });
-    });
-  });
-  return { lines, foundations, odds };
+/** Parts of the bill as they stand in a sentence. */
+const partWords: Readonly<Record<BillPart, string>> = {
+  deck: 'deck',
+  'bearings-joints': 'bearings and joints',
+  pylons: 'pylons',
+  piers: 'piers',
+  foundations: 'foundations',
+  abutments: 'abutments',
+  approaches: 'approaches',
+  'river-works': 'river works',
+  'temporary-works': 'temporary works',
+  'traffic-management': 'traffic management',
+  preliminaries: 'preliminaries',
+};
+const partOf = (at: At): BillPart => at.name('part') as BillPart;
+const hasPart = (lines: readonly MeasuredLine[], part: BillPart): boolean =>
+  lines.some((line) => line.part === part);
+
+/** What one part of the bill is made of: lines of the option, and what is founded under each support. */
+function itemsOf(at: At): { readonly lines: string[]; readonly founded: string[] } {
+  const part = partOf(at);
+  return {
+    lines: at.option.lines.flatMap((line, i) => (line.part === part ? [`${at.root}/lines/${i}`] : [])),
+    founded: at.option.supports.flatMap(({ foundations }, s) =>
+      foundations.some(({ lines }) => hasPart(lines, part))
+        ? [`${at.root}/supports/${s}/founded/${part}`]
+        : [],
+    ),
+  };
 }
 
 /** Errors that the draws of a part carry: of the forms measured in it, of the ground, of the option itself. */
@@ -63,7 +75,7 @@ function errorsOf(at: At, part: BillPart): string[] {
   );
   const forms = [...new Set(units.map((unit) => at.option.units[unit]!.form))];
   const onGround = at.option.supports.some(({ foundations }) =>
-    foundations.some(({ lines }) => lines.some((line) => line.part === part)),
+    foundations.some(({ lines }) => hasPart(lines, part)),
   );
   return [
     ...forms.map((form) => `data/drivers/modelError/${form}/sigma`),
@@ -132,20 +144,52 @@ export const priceFigures: readonly Descriptor[] = [
     (at) => at.support.foundations[at.index('f')]!.lines[at.index('line')]!,
   ),
   described({
+    path: 'options/:option/supports/:support/foundations/:f/founded/:part',
+    label: (at) =>
+      `${partWords[partOf(at)]} of support ${at.index('support') + 1} on ${at.support.foundations[at.index('f')]!.ground.replace('-', ' ')}`,
+    unit: money,
+    method: 'sum',
+    formula: (at) =>
+      hasPart(at.support.foundations[at.index('f')]!.lines, partOf(at))
+        ? 'lines of the foundation at mean rates'
+        : 'none is measured on this ground',
+    inputs: (at) => ({
+      lines: at.support.foundations[at.index('f')]!.lines.flatMap((line, i) =>
+        line.part === partOf(at) ? [`${at.foot}/foundations/${at.name('f')}/lines/${i}`] : [],
+      ),
+    }),
+    compute: ({ lines }) => sum(lines),
+  }),
+  described({
+    path: 'options/:option/supports/:support/founded/:part',
+    label: (at) => `${partWords[partOf(at)]} of support ${at.index('support') + 1}`,
+    unit: money,
+    method: 'mean over its ground',
+    formula: 'sum of odds of the ground x cost on it at mean rates',
+    inputs: (at) => {
+      const of = at.support.foundations.map((_, f) => `${at.foot}/foundations/${f}`);
+      return {
+        odds: of.map((path) => `${path}/odds`),
+        costs: of.map((path) => `${path}/founded/${partOf(at)}`),
+      };
+    },
+    compute: ({ odds, costs }) => sum(costs.map((cost, i) => odds[i]! * cost)),
+  }),
+  described({
     path: 'options/:option/parts/:part/p50',
-    label: (at) => `${at.name('part').replace('-', ' ')}, median`,
+    label: (at) => `${partWords[partOf(at)]}, median`,
     unit: money,
     method: (at) => `median of ${draw(at)} draws`,
     formula: (at) =>
       `P50 of sum (quantity x drawn rate) x errors drawn with it${
-        errorsOf(at, at.name('part') as BillPart).some((path) => path.includes('localGround'))
+        errorsOf(at, partOf(at)).some((path) => path.includes('localGround'))
           ? '; under every support the foundation of the ground drawn'
           : ''
       }${at.name('part') === 'preliminaries' ? '; months drawn between quick and slow' : ''}`,
     inputs: (at) => {
-      const part = at.name('part') as BillPart;
+      const part = partOf(at);
       const months = part === 'preliminaries' ? [`${at.root}/months/p10`, `${at.root}/months/p90`] : [];
-      return { ...linesOfPart(at, part), errors: errorsOf(at, part), months, ...draws };
+      return { ...itemsOf(at), errors: errorsOf(at, part), months, ...draws };
     },
   }),
   described({

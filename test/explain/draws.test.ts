@@ -1,6 +1,5 @@
 import { describe, expect, it } from 'vitest';
 import { figure, type Context } from '../../lib/explain/index.ts';
-import type { FigureInput } from '../../lib/model/index.ts';
 import {
   drawDrivers,
   drawRates,
@@ -21,15 +20,22 @@ function quantile(draws: readonly number[], p: number): number {
 
 const number = (context: Context, path: string): number => Number(figure(context, path).value);
 
+/** Lines that a figure comes down to, through what is founded under each support. */
+function linesUnder(context: Context, path: string): string[] {
+  return figure(context, path).because.inputs.flatMap((input) => {
+    if (/\/lines\/\d+$/u.test(input.path)) return [input.path];
+    return /\/founded\//u.test(input.path) ? linesUnder(context, input.path) : [];
+  });
+}
+
 /** Draws of one part of the bill, draw by draw from the inputs that its explanation names. */
 function partDraws(context: Context, draws: Draws, rates: RateDraws, option: number, part: string): number[] {
-  const { inputs } = figure(context, `options/${option}/parts/${part}`).because;
   const own = context.appraisal.options.find((one) => one.number === option)!;
-  const isLine = ({ path }: FigureInput): boolean => /\/lines\/\d+$/u.test(path);
+  const lines = linesUnder(context, `options/${option}/parts/${part}`);
   const z90 = 1.2815515655446004;
   const everyM = number(context, 'data/drivers/localGround/everyM');
   const sum = new Float64Array(draws.count);
-  for (const { path } of inputs.filter(isLine)) {
+  for (const path of lines) {
     const rate = figure(context, path).because.inputs.find((input) => input.path.startsWith('rates/'))!;
     const item = rate.path.split('/')[1]!;
     const quantity = number(context, `${path}/quantity`);
