@@ -12,6 +12,7 @@ import { formInk } from '../forms/formInk.ts';
 import { formLooks } from '../forms/formLook.ts';
 import { glyph } from '../forms/glyph.ts';
 import type { FormId, Status } from '../model.ts';
+import { familyOf } from '../model.ts';
 import { gridUprights, levelLine, limitLine } from './marks.ts';
 import type { Table } from './table.ts';
 
@@ -20,13 +21,17 @@ export interface SpanRow {
   readonly form: FormId;
   /** Usual, economical range. */
   readonly usual: readonly [from: number, to: number];
-  /** What has been built; the usual range where left out. */
-  readonly built?: readonly [from: number, to: number];
+  /** Possible range; the usual range where left out. */
+  readonly possible?: readonly [from: number, to: number];
   /** 5, 50 and 95 % of built bridges, where known. */
   readonly statistics?: readonly [p5: number, p50: number, p95: number];
+  /** How many bridges that counts. */
+  readonly bridges?: number;
   readonly status: Status;
   /** The number that decides, in words. */
   readonly words: string;
+  /** How far from another standing, in words. */
+  readonly flip?: string;
 }
 
 export interface SpanChartInput {
@@ -35,6 +40,10 @@ export interface SpanChartInput {
   readonly askedM: number | null;
   /** Beside the asked span, e.g. '63 m asked: 60 clear, plus a pier'. */
   readonly askedWords?: string;
+  /** Firmer lines part families, or in, possible and out; families unless said. */
+  readonly groups?: 'family' | 'status';
+  /** Ends of the span axis, m; what the rows need unless given. */
+  readonly axisM?: readonly [from: number, to: number];
   readonly widthPx: number;
   readonly paper?: Paper;
   readonly prefix?: string;
@@ -42,12 +51,15 @@ export interface SpanChartInput {
 
 const marked = [5, 10, 20, 50, 100, 200, 500, 1000, 2000];
 
-/** Bars of one row: built range thin, usual range thick, statistics as a grey line below with a tick at the median. */
+/** Fewer bridges than this are no statistics yet: their line is dotted. */
+const FEW_BRIDGES = 20;
+
+/** Bars of one row: possible range thin, usual range thick, statistics as a grey line below with a tick at the median. */
 function bars(row: SpanRow, y: number, x: (m: number) => number, ink: FormInk): Piece {
   const out = row.status === 'out';
   const line = out ? colours.rule : ink.line(row.form);
   const fill = out && ink.paper === 'colour' ? colours.rule : ink.bar(row.form);
-  const [from, to] = row.built ?? row.usual;
+  const [from, to] = row.possible ?? row.usual;
   return g(
     {},
     el('path', {
@@ -70,9 +82,28 @@ function bars(row: SpanRow, y: number, x: (m: number) => number, ink: FormInk): 
         d: `M${num(x(row.statistics[0]))},${num(y + 7.5)}H${num(x(row.statistics[2]))}M${num(x(row.statistics[1]))},${num(y + 5)}v5`,
         stroke: colours.third,
         'stroke-width': pens.fine,
+        'stroke-dasharray': row.bridges !== undefined && row.bridges < FEW_BRIDGES ? '2 2' : undefined,
         fill: 'none',
       }),
   );
+}
+
+/** The ends a span axis needs to hold rows and the asked span, m. */
+export function spanAxis(rows: readonly SpanRow[], askedM: number | null): readonly [number, number] {
+  const known = rows
+    .flatMap((row) => [...row.usual, ...(row.possible ?? [])])
+    .concat(askedM === null ? [] : [askedM]);
+  return [Math.min(5, ...known), Math.max(100, ...known) * 1.05];
+}
+
+/** The words of a row broken into lines; what it takes to stand otherwise comes last, in second ink. */
+function linesOf(row: SpanRow, widthPx: number, size: number): readonly { text: string; second: boolean }[] {
+  return [
+    ...wrapText(row.words, widthPx, size).map((text) => ({ text, second: false })),
+    ...(row.flip === undefined
+      ? []
+      : wrapText(row.flip, widthPx, size).map((text) => ({ text, second: true }))),
+  ];
 }
 
 /** Forms against span on a log axis, each in, possible or out in words with the number that decides. */
@@ -89,23 +120,19 @@ export function spanChart(input: SpanChartInput): Piece {
   const right = narrow ? widthPx - 62 : Math.min(left + 400, widthPx * 0.62);
   const statusX = narrow ? widthPx : right + 26;
   const wordsX = statusX + 56;
-  const known = rows
-    .flatMap((row) => [...row.usual, ...(row.built ?? [])])
-    .concat(askedM === null ? [] : [askedM]);
-  const low = Math.min(5, ...known);
-  const high = Math.max(100, ...known) * 1.05;
+  const [low, high] = input.axisM ?? spanAxis(rows, askedM);
   const scale = scaleLog([low, high], [left, right]);
   const x = (m: number): number => scale(m);
   const ticks = marked
     .filter((m) => m >= low && m <= high)
     .filter((m) => !narrow || [5, 20, 100, 500, 2000].includes(m));
   const head = 32;
-  const heights = rows.map((row) => {
-    const lines = narrow
-      ? wrapText(row.words, widthPx - nameX, letters.drawing).length
-      : wrapText(row.words, widthPx - wordsX, letters.table).length;
-    return narrow ? 25 + lines * 13 : Math.max(25, 9 + lines * 16);
-  });
+  const lettering = rows.map((row) =>
+    narrow ? linesOf(row, widthPx - nameX, letters.drawing) : linesOf(row, widthPx - wordsX, letters.table),
+  );
+  const heights = lettering.map(({ length: lines }) =>
+    narrow ? 25 + lines * 13 : Math.max(25, 9 + lines * 16),
+  );
   const tops = heights.map((_, index) => head + heights.slice(0, index).reduce((sum, one) => sum + one, 0));
   const bottom = head + heights.reduce((sum, one) => sum + one, 0);
   const foot = bottom + 20;
@@ -127,15 +154,16 @@ export function spanChart(input: SpanChartInput): Piece {
         const out = row.status === 'out';
         const ownInk = out ? colours.third : colours.ink;
         const before = rows[index - 1];
-        const newFamily =
-          before !== undefined && formLooks[before.form].family !== formLooks[row.form].family;
-        const lines = narrow
-          ? wrapText(row.words, widthPx - nameX, letters.drawing)
-          : wrapText(row.words, widthPx - wordsX, letters.table);
+        const newGroup =
+          before !== undefined &&
+          (input.groups === 'status'
+            ? before.status !== row.status
+            : familyOf[before.form] !== familyOf[row.form]);
+        const lines = lettering[index] ?? [];
         const wordsY = narrow ? y + 18 : y + 4.5 - (lines.length - 1) * 8;
         return g(
           { class: `form ${row.status}` },
-          index > 0 && levelLine(0, widthPx, top, newFamily),
+          index > 0 && levelLine(0, widthPx, top, newGroup),
           glyph(row.form, 0, y - 8, out ? colours.rule : ink.line(row.form)),
           label(nameX, y + 4.5, formLooks[row.form].short, { size: letters.table, fill: ownInk }),
           bars(row, y, x, ink),
@@ -145,10 +173,10 @@ export function spanChart(input: SpanChartInput): Piece {
             fill: ownInk,
             anchor: narrow ? 'end' : 'start',
           }),
-          lines.map((text, at) =>
+          lines.map(({ text, second }, at) =>
             label(narrow ? nameX : wordsX, wordsY + at * (narrow ? 13 : 16), text, {
               size: narrow ? letters.drawing : letters.table,
-              fill: out ? colours.third : narrow ? colours.second : colours.ink,
+              fill: out ? colours.third : narrow || second ? colours.second : colours.ink,
               halo: narrow,
             }),
           ),
@@ -157,7 +185,7 @@ export function spanChart(input: SpanChartInput): Piece {
       askedM !== null &&
         limitLine(x(askedM), 2, bottom, input.askedWords ?? `${length(askedM)} m asked`, ink.accent, widthPx),
       label(narrow ? 0 : left, foot, 'thick: usual range', { fill: colours.second }),
-      label(narrow ? 110 : left + 108, foot, 'thin: has been built', { fill: colours.second }),
+      label(narrow ? 110 : left + 108, foot, 'thin: possible', { fill: colours.second }),
       hasStatistics &&
         label(narrow ? 0 : left + 222, foot + (narrow ? 15 : 0), 'grey: 5, 50 and 95 % of built bridges', {
           fill: colours.second,
@@ -169,14 +197,28 @@ export function spanChart(input: SpanChartInput): Piece {
 /** The table behind the span chart. */
 export const spanTable = (input: SpanChartInput): Table => ({
   caption: 'Structural forms against span, m',
-  head: ['form', 'usual from', 'to', 'built from', 'to', 'standing', 'because'],
+  head: [
+    'form',
+    'usual from',
+    'to',
+    'possible from',
+    'to',
+    'bridges built',
+    '5 %',
+    '50 %',
+    '95 %',
+    'standing',
+    'because',
+  ],
   rows: input.rows.map((row) => [
     formLooks[row.form].name,
     length(row.usual[0]),
     length(row.usual[1]),
-    row.built === undefined ? '' : length(row.built[0]),
-    row.built === undefined ? '' : length(row.built[1]),
+    row.possible === undefined ? '' : length(row.possible[0]),
+    row.possible === undefined ? '' : length(row.possible[1]),
+    row.bridges === undefined ? '' : fixed(row.bridges, 0),
+    ...(row.statistics?.map(length) ?? ['', '', '']),
     row.status,
-    row.words,
+    row.flip === undefined ? row.words : `${row.words}; ${row.flip}`,
   ]),
 });

@@ -5,6 +5,7 @@ import {
   deviceCupboard,
   fileName,
   openFile,
+  pagesFrom,
   saveFile,
   savedWords,
   sheet,
@@ -107,10 +108,7 @@ async function start(): Promise<void> {
   const { head, brief, books } = store.slices;
   page.mount(document.body, {
     bar: {
-      pages: [
-        { words: 'Spanledger', href: './index.html' },
-        { words: 'Option study', href: './option-study.html', here: true },
-      ],
+      pages: pagesFrom('option-study'),
       tools: [
         saved,
         undo,

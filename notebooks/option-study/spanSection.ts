@@ -1,35 +1,20 @@
-import { formIds, spanWindow } from '../../lib/index.ts';
+import { formIds } from '../../lib/index.ts';
 import type { Guide } from '../../lib/index.ts';
 import { spanChart, spanTable, type SpanChartInput } from '../charts/spanChart.ts';
+import { spanRows } from '../charts/spanRows.ts';
 import { tableBehind } from '../charts/table.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
 
-/** Left end of the span axis, m. */
-const LEAST_M = 4;
-
-function chartInput(guide: Guide, openingM: number, widthPx: number): SpanChartInput {
-  const rows = formIds.map((form) => {
-    const { possible, usual } = spanWindow(form);
-    const answer = guide.forms.find((entry) => entry.form === form)!;
-    return {
-      form,
-      usual,
-      built: [Math.max(LEAST_M, possible[0]), possible[1]] as const,
-      status: answer.status,
-      words: answer.because[0] ?? '',
-    };
-  });
-  return {
-    rows,
-    askedM: guide.span,
-    askedWords: `${fixed(guide.span, 0)} m asked: ${fixed(openingM, 0)} clear, plus the piers`,
-    widthPx,
-    prefix: 'spans',
-  };
-}
+const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartInput => ({
+  rows: spanRows(guide, formIds),
+  askedM: guide.span,
+  askedWords: `${fixed(guide.span, 0)} m asked: ${fixed(openingM, 0)} clear, plus the piers`,
+  widthPx,
+  prefix: 'spans',
+});
 
 /** Section 2: every form against the span that the barred stretch asks for. */
 export function spanSection(page: Sheet, cells: StudyCells): LineSection {
@@ -43,6 +28,7 @@ export function spanSection(page: Sheet, cells: StudyCells): LineSection {
     page.cell({
       station: '2+010',
       title: 'What can span it',
+      wide: true,
       shows: { spanning, site },
       owns: [spanning],
       body: (v, room) => {
@@ -57,16 +43,22 @@ export function spanSection(page: Sheet, cells: StudyCells): LineSection {
         return [spanChart(input), tableBehind(spanTable(input))];
       },
       notes: [
-        h('p', {}, 'Every form is in, possible or out, with the number that decides.'),
         h(
           'p',
           {},
-          'Ranges come from rules; where sources disagree the wider range is thin and the range they agree on is thick.',
+          'Every form is in, possible or out, with the number that decides, and what it takes to stand otherwise.',
+        ),
+        h(
+          'p',
+          {},
+          'Ranges come from rules; where sources disagree the wider range is thin and the range they agree on is thick. Where they disagree, and by how much, is shown on the page ',
+          h('a', { href: './span-chart.html' }, 'Span chart'),
+          '.',
         ),
         h(
           'p',
           { class: 'source' },
-          'Handbook tables and bridge records, some read, some from memory: each rule names its own.',
+          'Handbook tables, some read, some from memory: each rule names its own. Grey: US National Bridge Inventory 2024, bridges of 152 m and more built since 1980, read; dotted where fewer than 20 were built.',
         ),
       ],
     }),

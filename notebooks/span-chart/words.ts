@@ -1,0 +1,80 @@
+import {
+  builtShares,
+  type BuiltBucket,
+  type DepthGuidance,
+  type Guide,
+  type Status,
+} from '../../lib/index.ts';
+import { fixed, length, listed, plain } from '../format.ts';
+import { formLooks } from '../forms/formLook.ts';
+
+const small = [
+  'no',
+  'one',
+  'two',
+  'three',
+  'four',
+  'five',
+  'six',
+  'seven',
+  'eight',
+  'nine',
+  'ten',
+  'eleven',
+  'twelve',
+];
+
+/** A count in words up to twelve, in figures beyond. */
+export const countWords = (count: number): string => small[count] ?? String(count);
+
+const capital = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
+
+const namesOf = (guide: Guide, status: Status): readonly string[] =>
+  guide.forms.filter((one) => one.status === status).map(({ form }) => formLooks[form].short.toLowerCase());
+
+/** The answer in a sentence: which forms are in, and how many are possible and out. */
+export function answerWords(guide: Guide): string {
+  const inside = namesOf(guide, 'in');
+  const possible = namesOf(guide, 'possible').length;
+  const out = namesOf(guide, 'out').length;
+  const rest = `${countWords(possible)} more ${possible === 1 ? 'is' : 'are'} possible, ${countWords(out)} ${out === 1 ? 'is' : 'are'} out.`;
+  if (inside.length === 0) return capital(`no form is in; ${rest}`);
+  return `${capital(listed(inside))} ${inside.length === 1 ? 'is' : 'are'} in; ${rest}`;
+}
+
+/** Nearest end of the usual range over the forms that are in: what changes first when the span does. */
+export function firstTurnWords(guide: Guide): string {
+  const turns = guide.forms.flatMap(({ form, flip }) =>
+    flip?.fact === 'mainSpanM' ? [{ form, flip, by: Math.abs(flip.to - flip.from) }] : [],
+  );
+  const first = turns.sort((a, b) => a.by - b.by)[0];
+  if (first === undefined) return 'No change of the span alone changes a standing.';
+  const { form, flip, by } = first;
+  return `First to change: ${formLooks[form].short.toLowerCase()} is ${flip.becomes} once the span is ${plain(by)} m ${flip.to > flip.from ? 'longer' : 'shorter'}.`;
+}
+
+/** One over a ratio: 0.04 -> '1/25', 0.0667 -> '1/15', 0.1429 -> '1/7'. */
+const oneOver = (ratio: number): string => `1/${plain(Number((1 / ratio).toFixed(1 / ratio < 20 ? 1 : 0)))}`;
+
+/** A band of depth as a ratio in words: '1/25 to 1/20 of the span', with what else is to be said of it. */
+export function ratioWords({ ratio, of, method, leastM }: DepthGuidance): string {
+  const least = leastM === undefined ? '' : `; under ${fixed(leastM, 2)} m nobody can get through it`;
+  const only = method === undefined ? '' : method === 'launch' ? ', launched' : `, ${method}`;
+  return `${oneOver(ratio[0])} to ${oneOver(ratio[1])} of the ${of}${only}${least}`;
+}
+
+/** What was built at a span, the two forms most often, in a sentence. */
+export function builtWords(spanM: number, bucket: BuiltBucket | null): string {
+  if (bucket === null) return `Beyond 500 m too few were built to count; ${length(spanM)} m is asked.`;
+  const first = builtShares.classes
+    .map(({ id, words }) => ({
+      words,
+      percent: bucket.percent[id] ?? 0,
+      isDoubted: bucket.doubted.includes(id),
+    }))
+    .filter(({ isDoubted }) => !isDoubted)
+    .sort((a, b) => b.percent - a.percent)
+    .slice(0, 2)
+    .map(({ words, percent }) => `${fixed(percent, 0)} % ${words}`);
+  return `Of ${fixed(bucket.count, 0)} bridges with a longest span of ${bucket.fromM} to ${bucket.toM} m: ${listed(first)}.`;
+}
