@@ -1,13 +1,14 @@
 import { appraiseOption, type PricedAppraisal } from './appraise/appraiseOption.ts';
+import { drawn } from './appraise/drawn.ts';
 import { formFacts } from './appraise/facts.ts';
+import type { Memory } from './appraise/memory.ts';
 import { proposalsFor } from './appraise/proposals.ts';
 import { numberOptions } from './appraise/register.ts';
-import type { Sizer } from './appraise/sizer.ts';
+import { finish, saying } from './appraise/work.ts';
 import { workbench } from './appraise/workbench.ts';
 import { stand } from './decide/index.ts';
 import { formModule, sizeableForms } from './forms/index.ts';
 import type { Appraisal, Arrangement, Dropped, DroppedCount, Study } from './model/index.ts';
-import { drawDrivers, drawRates } from './price/index.ts';
 import { rulingsFor, statusOf } from './rules/index.ts';
 import { fingerprint } from './study/index.ts';
 
@@ -22,12 +23,12 @@ export interface Step {
  * Works out a whole study, from brief to standing, in steps that a worker may pause or drop between.
  *
  * Forms that a rule puts out are not searched unless the study asks for them. Everything proposed, kept or dropped is
- * in the result with its reasons. Pure: the same study gives the same appraisal; `memory` only saves time.
+ * in the result with its reasons. Pure: the same study gives the same appraisal; `kept` only saves time.
  *
  * @throws RangeError where rates, draws or a form cannot serve what the study asks
  */
-export function* appraiseSteps(study: Study, memory?: Sizer): Generator<Step, Appraisal> {
-  const bench = workbench(study, memory);
+export function* appraiseSteps(study: Study, kept?: Memory): Generator<Step, Appraisal, unknown> {
+  const bench = workbench(study, kept);
   const { site } = bench;
   const asked = study.options.forms.length > 0 ? study.options.forms : sizeableForms;
   const proposals: Arrangement[] = [];
@@ -36,7 +37,8 @@ export function* appraiseSteps(study: Study, memory?: Sizer): Generator<Step, Ap
 
   let done = 0;
   for (const form of asked) {
-    yield { done, of: 2 * asked.length + 1, what: `arranging ${formModule(form).name}` };
+    const step = { done, of: 2 * asked.length + 1, what: `arranging ${formModule(form).name}` };
+    yield step;
     done += 1;
     const rulings = rulingsFor('form', form, formFacts(site));
     if (statusOf(rulings) === 'out' && !study.options.workOutAnyway.includes(form)) {
@@ -44,7 +46,7 @@ export function* appraiseSteps(study: Study, memory?: Sizer): Generator<Step, Ap
       dropped.push({ form, because: out.flatMap((ruling) => ruling.because) });
       continue;
     }
-    const found = proposalsFor(bench, form);
+    const found = yield* saying(step, proposalsFor(bench, form));
     proposals.push(...found.arrangements);
     droppedCounts.push(...found.counts);
     if (found.arrangements.length === 0) dropped.push({ form, because: found.because });
@@ -52,17 +54,17 @@ export function* appraiseSteps(study: Study, memory?: Sizer): Generator<Step, Ap
 
   const { options, register, retired } = numberOptions(proposals, study.options);
   const forms = [...new Set(options.flatMap((option) => option.units.map((unit) => unit.form)))];
-  const draws = drawDrivers(site, study.books, forms);
-  const rates = drawRates(bench.rates, draws);
+  const onDraws = drawn(bench, forms);
   const priced: PricedAppraisal[] = [];
   for (const option of options) {
-    yield {
+    const step = {
       done,
       of: done + options.length - priced.length + 1,
       what: `working out option ${option.number}`,
     };
+    yield step;
     done += 1;
-    priced.push(appraiseOption(bench, draws, rates, option));
+    priced.push(yield* saying(step, appraiseOption(bench, onDraws, option)));
   }
 
   yield { done, of: done + 1, what: 'ranking' };
@@ -88,10 +90,6 @@ export function* appraiseSteps(study: Study, memory?: Sizer): Generator<Step, Ap
 }
 
 /** A whole study at one go; see `appraiseSteps`. */
-export function appraise(study: Study, memory?: Sizer): Appraisal {
-  const steps = appraiseSteps(study, memory);
-  for (;;) {
-    const step = steps.next();
-    if (step.done) return step.value;
-  }
+export function appraise(study: Study, kept?: Memory): Appraisal {
+  return finish(appraiseSteps(study, kept));
 }

@@ -1,9 +1,10 @@
 /** The front door: notebooks and tests of the whole import from here. */
 export * from './model/index.ts';
 export { appraise, appraiseSteps, type Step } from './appraise.ts';
-export { appraiseOption, type PricedAppraisal } from './appraise/appraiseOption.ts';
+export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
+export type { PricedAppraisal } from './appraise/appraiseOption.ts';
 export { formFacts } from './appraise/facts.ts';
-export { sizer, type Sizer } from './appraise/sizer.ts';
+export { memory, type Memory } from './appraise/memory.ts';
 export { workbench, type Workbench } from './appraise/workbench.ts';
 export { publishedBands, type BandColumn, type PublishedBand } from './bands/publishedBands.ts';
 export { figure, figurePaths, type Context as FigureContext } from './explain/index.ts';

@@ -1,10 +1,13 @@
 import type { AppraisedOption, Check, Option, Status, WorkedOption } from '../model/index.ts';
-import { optionError, priceOption, type Draws, type PricedOption, type RateDraws } from '../price/index.ts';
+import { optionError, priceOption, type PricedOption } from '../price/index.ts';
 import { rulingsFor, statusOf } from '../rules/index.ts';
 import { expectedLines } from '../substructure/index.ts';
 import { perM2, splitQuantities } from '../takeoff/index.ts';
+import type { Drawn } from './drawn.ts';
 import { optionFacts } from './facts.ts';
-import { mainUnit, spareOf, workOption } from './workOption.ts';
+import { remembered } from './kept.ts';
+import type { Work } from './work.ts';
+import { mainUnit, spareOf, workOption, workOptionAt, type Worked } from './workOption.ts';
 import type { Workbench } from './workbench.ts';
 
 /** An option worked out, priced and ruled on, with its cost in every draw. */
@@ -15,25 +18,44 @@ export interface PricedAppraisal {
 
 /**
  * One option from arrangement to P50, on the stored draws of its study: sizes, supports, quantities, months, price and
- * rulings. This is what dragging a pier asks for; odds and ranking are worked out on release.
+ * rulings. Odds and ranking need the others as well. Pauses after each depth tried.
  *
  * @throws RangeError where a form cannot be sized for what it is asked
  */
-export function appraiseOption(
+export function* appraiseOption(bench: Workbench, drawn: Drawn, option: Option): Work<PricedAppraisal> {
+  return judged(bench, drawn, yield* workOption(bench, option));
+}
+
+/**
+ * The same at depths that are given for each unit of the option, m, so that nothing is searched: what dragging asks for.
+ *
+ * @throws RangeError where a form cannot be sized for what it is asked
+ */
+export function appraiseOptionAt(
   bench: Workbench,
-  draws: Draws,
-  rates: RateDraws,
+  drawn: Drawn,
   option: Option,
+  depthsM: readonly number[],
+): PricedAppraisal {
+  return judged(bench, drawn, workOptionAt(bench, option, depthsM));
+}
+
+/** A worked option priced and ruled on. */
+function judged(
+  bench: Workbench,
+  { draws, rates, key }: Drawn,
+  { option: worked, key: made }: Worked,
 ): PricedAppraisal {
   const { study, site } = bench;
-  const worked = workOption(bench, option);
-  const priced = priceOption(worked, draws, rates, optionError(draws, option.number));
+  const priced = remembered(bench.keptHere.priced, `${worked.number} ${made} ${key}`, () =>
+    priceOption(worked, draws, rates, optionError(draws, worked.number)),
+  );
   const spare = spareOf(site, worked);
   const headroom = spare && { spareM: spare.spareM, reason: spare.limit.reason, chainageM: spare.chainageM };
   const { budget } = study.brief;
   const chance = budget === 'unknown' ? 'unknown' : shareWithin(priced.totals, budget.amount);
   const facts = optionFacts(study, site, worked, headroom, chance);
-  const rulings = rulingsFor(['form', 'arrangement', 'option'], option.form, facts);
+  const rulings = rulingsFor(['form', 'arrangement', 'option'], worked.form, facts);
   const status: Status = statusOf(rulings);
   const deckAreaM2 = site.lengthM * site.deck.widthM;
   const foundations = worked.supports.flatMap((support) => expectedLines({ ...support, lines: [] }));

@@ -1,3 +1,5 @@
+import type { Work } from './work.ts';
+
 /** What one trial depth comes to. */
 export interface DepthTrial {
   /** Money; only differences matter. */
@@ -16,25 +18,27 @@ const STEPS = 20;
  * Depths whose checks hold come first; where none holds the one with the lowest utilisation is returned.
  *
  * The band is tried at `trials` depths and once more between the neighbours of the best; costs between trials are read
- * off straight lines.
+ * off straight lines. The work pauses after each trial.
  *
  * @param range least and most depth, m, least > 0
  * @param tryAt cost and utilisation at one depth, m
  */
-export function leastCostDepth(
+export function* leastCostDepth(
   range: readonly [least: number, most: number],
   tryAt: (depthM: number) => DepthTrial,
-  trials = 5,
-): number {
+  trials: number,
+): Work<number> {
   const least = Math.ceil(range[0] * STEPS - 1e-9);
   const most = Math.max(least, Math.floor(range[1] * STEPS + 1e-9));
   const tried = new Map<number, DepthTrial>();
-  const visit = (step: number): void => {
+  const visit = function* (step: number): Work<void> {
     const on = Math.round(step);
-    if (!tried.has(on)) tried.set(on, tryAt(on / STEPS));
+    if (tried.has(on)) return;
+    tried.set(on, tryAt(on / STEPS));
+    yield;
   };
   const count = Math.max(2, Math.min(trials, most - least + 1));
-  for (let i = 0; i < count; i++) visit(least + ((most - least) * i) / (count - 1));
+  for (let i = 0; i < count; i++) yield* visit(least + ((most - least) * i) / (count - 1));
 
   const sorted = (): [on: number, trial: DepthTrial][] => [...tried].sort((a, b) => a[0] - b[0]);
   const holding = (): [on: number, trial: DepthTrial][] => sorted().filter(([, t]) => t.utilisation <= 1);
@@ -47,7 +51,7 @@ export function leastCostDepth(
   const rows = sorted();
   const at = rows.findIndex(([on]) => on === cheapest(holding())[0]);
   for (const beside of [rows[at - 1], rows[at + 1]]) {
-    if (beside) visit((rows[at]![0] + beside[0]) / 2);
+    if (beside) yield* visit((rows[at]![0] + beside[0]) / 2);
   }
 
   const final = holding();

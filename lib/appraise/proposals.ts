@@ -1,22 +1,16 @@
 import { arrange } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { Arrangement, DroppedCount, FormId, MethodId } from '../model/index.ts';
+import type { Arrangement, FormId, MethodId } from '../model/index.ts';
 import { rule, rulingsFor } from '../rules/index.ts';
 import { arrangementFacts } from './facts.ts';
+import type { Proposals } from './memory.ts';
 import { relaxationWords } from './relaxationWords.ts';
 import { requestFor } from './requestFor.ts';
+import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
 
 /** Proposals of one form at most. */
 const PER_FORM = 3;
-
-/** Best arrangements of one form, or why there are none. */
-export interface Proposals {
-  readonly arrangements: readonly Arrangement[];
-  readonly counts: readonly DroppedCount[];
-  /** Smallest relaxations, smallest first, where nothing fits. */
-  readonly because: readonly string[];
-}
 
 /** Whether the rules warn of the method by which an arrangement is to be built. */
 function meetsTrouble(bench: Workbench, arrangement: Arrangement): boolean {
@@ -28,26 +22,35 @@ function meetsTrouble(bench: Workbench, arrangement: Arrangement): boolean {
 
 /**
  * Searches a form by its usual method, and by the next one where the rules warn of the first. The cheapest of each
- * method is proposed first, then the next best of all, three at most; the rest is counted by reason.
+ * method is proposed first, then the next best of all, three at most; the rest is counted by reason. Pauses while the
+ * table is laid, and between the searches.
  */
-export function proposalsFor(bench: Workbench, form: FormId): Proposals {
+export function* proposalsFor(bench: Workbench, form: FormId): Work<Proposals> {
+  const store = bench.keptHere.proposals;
+  const key = `${form} ${bench.booksKey}`;
+  return store.get(key) ?? store.put(key, yield* search(bench, form));
+}
+
+function* search(bench: Workbench, form: FormId): Work<Proposals> {
   const { site } = bench;
   const counts = new Map<string, number>();
   const count = (reason: string, more: number): void => {
     if (more > 0) counts.set(reason, (counts.get(reason) ?? 0) + more);
   };
   const because: string[] = [];
-  const search = (method: MethodId): readonly Arrangement[] => {
+  const byOne = function* (method: MethodId): Work<readonly Arrangement[]> {
     const asked = { form, method };
+    yield* bench.tables.lay(asked);
     const result = arrange(requestFor(asked, site), site, bench.tables.tableFor(asked));
     for (const dropped of result.dropped) count(dropped.reason, dropped.count);
     because.push(...result.relaxations.map(relaxationWords));
+    yield;
     return result.arrangements;
   };
 
   const byMethod: (readonly Arrangement[])[] = [];
   for (const method of formModule(form).methods) {
-    const found = search(method);
+    const found = yield* byOne(method);
     byMethod.push(found);
     if (found[0] && !meetsTrouble(bench, found[0])) break;
   }

@@ -2,7 +2,7 @@ import type { ArrangeRequest, Windows } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
 import type { Site } from '../model/index.ts';
 import { endRatioWindow, spanWindow } from '../rules/index.ts';
-import type { FormAndMethod } from './costTable.ts';
+import type { FormAndMethod } from './trialRows.ts';
 
 /** Half a pier along the road with its working space, kept clear of barred stretches, m. Common practice, no source. */
 export const PIER_HALF_WIDTH_M = 1.5;

@@ -9,10 +9,13 @@ import {
   roadLevelAt,
   type DepthAlong,
 } from '../site/index.ts';
-import { expectedLines, standSupports } from '../substructure/index.ts';
+import { expectedLines, placeText, standOneSupport, standSupports } from '../substructure/index.ts';
 import { measure } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
+import { remembered } from './kept.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
+import type { AtDepth } from './memory.ts';
+import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
 
 /** Spans of a unit, m. */
@@ -81,47 +84,52 @@ function taskOf(
   };
 }
 
-/** One option at one depth of its main unit: designs, road, supports, quantities, months, and its cost at mean rates. */
-interface AtDepth {
-  readonly designs: readonly Design[];
-  readonly profile: RoadProfile;
-  readonly supports: WorkedOption['supports'];
-  readonly lines: WorkedOption['lines'];
-  readonly months: WorkedOption['months'];
-  readonly cost: number;
+/**
+ * Supports of an option, each taken from memory where one has stood on the same place under the same loads.
+ */
+function standing(
+  bench: Workbench,
+  units: readonly Unit[],
+  designs: readonly Design[],
+  profile: RoadProfile,
+) {
+  return standSupports(bench.site, units, designs, profile, (site, ask) =>
+    remembered(bench.kept.supports, `${placeText(site, ask.chainageM)} ${JSON.stringify(ask)}`, () =>
+      standOneSupport(site, ask),
+    ),
+  );
 }
 
-function workAt(bench: Workbench, option: Option, depthM: number): AtDepth {
-  const { site, size, costOf } = bench;
-  const table = bench.tables.tableFor(option);
-  const depthOf = (unit: Unit): number =>
-    unit.role === 'main' ? depthM : Math.round(table.depthM(unit.form, Math.max(...spansOf(unit))) * 20) / 20;
+/** An option at given depths of its units, m: designs, road, supports, quantities and months. */
+function workAt(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
+  const { site, size } = bench;
+  const { units } = option;
   // The road follows the depths, and the designs see the road only through the height under them.
   const guess: DepthAlong = {
-    xM: option.units.flatMap((unit) => [unit.supportsM[0]!, unit.supportsM.at(-1)!]),
-    depthM: option.units.flatMap((unit) =>
-      [depthOf(unit), depthOf(unit)].map((d) => constructionDepth(site.deck, d)),
-    ),
+    xM: units.flatMap((unit) => [unit.supportsM[0]!, unit.supportsM.at(-1)!]),
+    depthM: depthsM.flatMap((d) => [constructionDepth(site.deck, d), constructionDepth(site.deck, d)]),
   };
   const before = profileOrNearest(site, guess);
-  const designs = option.units.map((unit) => size(taskOf(bench, option, unit, depthOf(unit), before)));
-  const profile = profileOrNearest(site, depthAlong(site, option.units, designs));
-  const supports = standSupports(site, option.units, designs, profile);
+  const designs = units.map((unit, k) => size(taskOf(bench, option, unit, depthsM[k]!, before)));
+  const profile = profileOrNearest(site, depthAlong(site, units, designs));
+  const supports = standing(bench, units, designs, profile);
   const programme = planProgramme(site, designs, supports);
   const lines = [...measure(site, designs, supports, profile), ...programme.lines];
-  const foundations = supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
-  return {
-    designs,
-    profile,
-    supports,
-    lines,
-    months: programme.months,
-    cost: costOf(lines) + costOf(foundations),
-  };
+  return { designs, profile, supports, lines, months: programme.months };
+}
+
+const keyOf = ({ form, method, units }: Option, depthsM: readonly number[]): string =>
+  JSON.stringify([form, method, units, depthsM]);
+
+/** The same, from memory where it has been worked out before. */
+function atDepths(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
+  return remembered(bench.keptHere.atDepth, keyOf(option, depthsM), () => workAt(bench, option, depthsM));
 }
 
 /** Depths tried before the two beside the best. */
 const TRIALS = 4;
+/** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
+const OVER_DECK_ALONE = 1.15;
 
 /**
  * Depths worth trying, m: from the least of the published band to somewhat over that of least deck cost. Clearance, road
@@ -134,51 +142,61 @@ function depthsToTry(bench: Workbench, option: Option, main: Unit): readonly [le
   return [least, Math.max(least, Math.min(most, OVER_DECK_ALONE * deckAlone))];
 }
 
-/** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
-const OVER_DECK_ALONE = 1.15;
+/** Depths of all units, m, when the main unit has the one given: approaches have theirs of least deck cost. */
+function depthsOf(bench: Workbench, option: Option, depthM: number): number[] {
+  const table = bench.tables.tableFor(option);
+  return option.units.map((unit) =>
+    unit.role === 'main' ? depthM : Math.round(table.depthM(unit.form, Math.max(...spansOf(unit))) * 20) / 20,
+  );
+}
+
+/** Depth of the main unit, m: the shallowest within 1 % of the least cost of the whole crossing at mean rates. */
+function* bestDepth(bench: Workbench, option: Option, main: Unit): Work<number> {
+  const { site, costOf } = bench;
+  return yield* leastCostDepth(
+    depthsToTry(bench, option, main),
+    (trial) => {
+      const { designs, profile, supports, lines } = atDepths(bench, option, depthsOf(bench, option, trial));
+      const foundations = supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
+      const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
+      const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
+      return {
+        cost: costOf(lines) + costOf(foundations),
+        // A depth that fouls a clearance fits no better than one that is too weak.
+        utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation,
+      };
+    },
+    TRIALS,
+  );
+}
 
 /**
  * Works out one option: designs of its units, road profile, supports, take-off and programme. A depth that the option
- * leaves open is the shallowest within 1 % of the least cost of the whole crossing inside the published band.
+ * leaves open is the shallowest within 1 % of the least cost of the whole crossing inside the published band. Pauses
+ * after each depth tried.
  *
  * @throws RangeError where a form cannot be sized for what it is asked
  */
-export function workOption(bench: Workbench, option: Option): WorkedOption {
-  const { site } = bench;
+export function* workOption(bench: Workbench, option: Option): Work<Worked> {
   const main = mainUnit(option.units);
-  const known = new Map<number, AtDepth>();
-  const at = (depthM: number): AtDepth => {
-    const found = known.get(depthM) ?? workAt(bench, option, depthM);
-    known.set(depthM, found);
-    return found;
-  };
-  const depthM =
-    option.depthM ??
-    leastCostDepth(
-      depthsToTry(bench, option, main),
-      (trial) => {
-        const { cost, designs, profile } = at(trial);
-        const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
-        const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
-        // A depth that fouls a clearance fits no better than one that is too weak.
-        return { cost, utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation };
-      },
-      TRIALS,
-    );
-  const { designs, profile, supports, lines, months } = at(depthM);
-  const design = designs[option.units.indexOf(main)]!;
+  const depthM = option.depthM ?? (yield* bestDepth(bench, option, main));
+  return workOptionAt(bench, option, depthsOf(bench, option, depthM));
+}
+
+/** A worked option and the text of what it was worked out from on its site. */
+export interface Worked {
+  readonly option: WorkedOption;
+  readonly key: string;
+}
+
+/** One option at depths that are given for each of its units, m; see `workOption`. */
+export function workOptionAt(bench: Workbench, option: Option, depthsM: readonly number[]): Worked {
+  const { number, form, method, units } = option;
+  const found = atDepths(bench, option, depthsM);
+  const { depthM } = found.designs[units.indexOf(mainUnit(units))]!;
   return {
-    number: option.number,
-    form: option.form,
-    family: formModule(option.form).family,
-    method: option.method,
-    units: option.units,
-    designs,
-    depthM: design.depthM,
-    profile,
-    supports,
-    lines,
-    months,
+    option: { number, form, family: formModule(form).family, method, units, depthM, ...found },
+    key: keyOf(option, depthsM),
   };
 }
 

@@ -1,5 +1,6 @@
 import { leastCostDepth } from '../appraise/leastCostDepth.ts';
 import { depthRange } from '../appraise/depthRange.ts';
+import { finish } from '../appraise/work.ts';
 import { formModule, sizeableForms } from '../forms/index.ts';
 import type { DeckStrip, FormId, Problem, StandardId, UnitTask } from '../model/index.ts';
 import { standardIds } from '../model/index.ts';
@@ -11,6 +12,8 @@ import { rounded } from './rounded.ts';
 
 const flagNames = ['form', 'spans', 'width', 'lanes', 'depth', 'carriageway', 'radius', 'loading', 'girders'];
 const SURFACING_M = 0.09;
+/** Depths tried before the two beside the best. */
+const TRIALS = 5;
 /** Barriers take what the carriageway leaves of the width, half on each side. */
 const BARRIERS_M = 1;
 
@@ -142,11 +145,17 @@ const module = formModule(task.form);
 const mean = meanRates(ratesFor({ ratePack: 'demo-2026', rates: [] }));
 const depthM =
   asked ??
-  leastCostDepth(depthRange(task.form, task.method, task.spansM, task.deck), (trialM) => {
-    const { lines, limitingCheck } = module.size({ ...task, depthM: trialM });
-    const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
-    return { cost, utilisation: limitingCheck.utilisation };
-  });
+  finish(
+    leastCostDepth(
+      depthRange(task.form, task.method, task.spansM, task.deck),
+      (trialM) => {
+        const { lines, limitingCheck } = module.size({ ...task, depthM: trialM });
+        const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
+        return { cost, utilisation: limitingCheck.utilisation };
+      },
+      TRIALS,
+    ),
+  );
 const design = module.size({ ...task, depthM });
 const { superstructure, supports } = splitQuantities(design.lines);
 const deckAreaM2 = task.spansM.reduce((sum, span) => sum + span, 0) * task.deck.widthM;

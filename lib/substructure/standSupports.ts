@@ -19,7 +19,8 @@ interface Meeting {
 
 /**
  * Stands every support of an option, in the order of chainage: where two units meet their reactions add up and a joint
- * takes the movements of both. `designs` has one design per unit, in order.
+ * takes the movements of both. `designs` has one design per unit, in order. `stand` is the one way a support is sized;
+ * a caller that remembers supports puts its memory before it.
  * Throws a RangeError when units and designs do not belong together.
  */
 export function standSupports(
@@ -27,6 +28,7 @@ export function standSupports(
   units: readonly Unit[],
   designs: readonly Design[],
   profile: RoadProfile,
+  stand: (site: Site, ask: SupportAsk) => Support = standOneSupport,
 ): Support[] {
   if (units.length === 0 || units.length !== designs.length) {
     throw new RangeError(
@@ -53,7 +55,7 @@ export function standSupports(
   const chainages = [...meetings.keys()].sort((a, b) => a - b);
   return chainages.map((chainageM, index) => {
     const end = index === 0 || index === chainages.length - 1;
-    return standOneSupport(site, askAt(site, profile, chainageM, index, end, meetings.get(chainageM)!));
+    return stand(site, askAt(site, profile, chainageM, index, end, meetings.get(chainageM)!));
   });
 }
 

@@ -1,8 +1,8 @@
-import { appraiseSteps, sizer } from '../../lib/index.ts';
+import { appraiseSteps, memory } from '../../lib/index.ts';
 import type { Study } from '../../lib/index.ts';
 
 /** Kept as long as the worker lives: the next study is nearly always the last one with one thing changed. */
-const memory = sizer();
+const kept = memory();
 
 /** What the worker of the notebook does. */
-export const jobs = { appraise: (study: Study) => appraiseSteps(study, memory) };
+export const jobs = { appraise: (study: Study) => appraiseSteps(study, kept) };

@@ -1,0 +1,53 @@
+import { faultsOf } from '../arrange/index.ts';
+import type { AppraisedOption, Option, Site, Study, Unit } from '../model/index.ts';
+import { appraiseOptionAt } from './appraiseOption.ts';
+import { drawn } from './drawn.ts';
+import type { Memory } from './memory.ts';
+import { requestFor } from './requestFor.ts';
+import { workbench } from './workbench.ts';
+
+/** An option as it stood, worked out again for a study that has changed since. */
+export interface KeptAppraisal {
+  /** Null where it cannot be worked out at all. */
+  readonly option: AppraisedOption | null;
+  /** Why it may not stand as it is; empty where nothing forbids it. */
+  readonly faults: readonly string[];
+}
+
+/** The same supports, with the abutments where the brief has them now; null where a support would lie beyond one. */
+function between({ startM, endM }: Site, units: readonly Unit[]): Unit[] | null {
+  const last = units.length - 1;
+  const moved = units.map((unit, u) => ({
+    ...unit,
+    supportsM: unit.supportsM.map((x, i) =>
+      u === 0 && i === 0 ? startM : u === last && i === unit.supportsM.length - 1 ? endM : x,
+    ),
+  }));
+  const rises = moved.every(({ supportsM }) => supportsM.every((x, i) => i === 0 || x > supportsM[i - 1]!));
+  return rises ? moved : null;
+}
+
+/**
+ * Works out one option of an earlier appraisal for the study as it is now, its arrangement and depths frozen: what a page
+ * shows while a figure is dragged, before the search has answered. Price and checks are those of the pipeline. A brief that
+ * forbids the arrangement says why and throws nothing.
+ *
+ * @throws RangeError on books that cannot be drawn
+ */
+export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory): KeptAppraisal {
+  const { number, form, method, designs, depthM } = before;
+  const bench = workbench(study, kept);
+  const { site } = bench;
+  const units = between(site, before.units);
+  if (units === null) return { option: null, faults: ['a support would stand beyond an abutment'] };
+  const option: Option = { number, form, method, units, depthM: depthM.midspan, origin: 'kept' };
+  const onDraws = drawn(bench, [...new Set(units.map((unit) => unit.form))]);
+  const faults = faultsOf(units, requestFor(option, site), site);
+  const depthsM = designs.map((design) => design.task.depthM);
+  try {
+    return { option: appraiseOptionAt(bench, onDraws, option, depthsM).option, faults };
+  } catch (error) {
+    if (!(error instanceof RangeError)) throw error;
+    return { option: null, faults: [...faults, error.message] };
+  }
+}

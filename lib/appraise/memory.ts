@@ -1,0 +1,84 @@
+import type {
+  Arrangement,
+  Design,
+  DroppedCount,
+  MeasuredLine,
+  Support,
+  WorkedOption,
+} from '../model/index.ts';
+import type { Draws, PricedOption } from '../price/index.ts';
+import { kept, remembered, type Kept } from './kept.ts';
+
+/** A trial unit of one governing span at its depth of least cost. */
+export interface TrialRow {
+  readonly depthM: number;
+  /** Money per m of deck, by the share of the governing span that a span is of. */
+  readonly perM: readonly number[];
+  /** Money that does not grow with the deck, by number of pylons. */
+  readonly fixed: readonly number[];
+  /** What a support carries for each metre of the spans beside it, permanent and traffic together, kN/m. */
+  readonly loadKNm: number;
+}
+
+/** One option at given depths: what it is made of and what it would cost at mean rates hangs on nothing else. */
+export type AtDepth = Pick<WorkedOption, 'designs' | 'profile' | 'supports' | 'lines' | 'months'>;
+
+/** Best arrangements of one form, or why there are none. */
+export interface Proposals {
+  readonly arrangements: readonly Arrangement[];
+  readonly counts: readonly DroppedCount[];
+  /** Smallest relaxations, smallest first, where nothing fits. */
+  readonly because: readonly string[];
+}
+
+/** What was worked out for one brief, whatever its budget. */
+export interface SiteMemory {
+  /** By form and books. */
+  readonly proposals: Kept<Proposals>;
+  /** By arrangement, method and depths. */
+  readonly atDepth: Kept<AtDepth>;
+  /** By the same, books and draws. */
+  readonly priced: Kept<PricedOption>;
+}
+
+/** One set of draws and the rates put on it so far, by item and the points of the rate. */
+export interface DrawsMemory {
+  readonly draws: Draws;
+  readonly rates: Kept<Float64Array>;
+}
+
+/**
+ * What one appraisal leaves for the next, which is nearly always the last one with one thing changed. All of it comes
+ * from pure functions and is kept under everything it was made from, so it saves time and changes no result.
+ */
+export interface Memory {
+  /** By task. */
+  readonly designs: Kept<Design>;
+  /** By form, method, span, deck and books. */
+  readonly rows: Kept<TrialRow>;
+  /** Measured lines of trial piers by the place they stand at; there, by load. */
+  readonly piers: Kept<(readonly MeasuredLine[])[]>;
+  /** By place and what is asked of them. */
+  readonly supports: Kept<Support>;
+  /** By brief without its budget. */
+  readonly sites: Kept<SiteMemory>;
+  /** By seed, number, length, odds of the ground and forms. */
+  readonly draws: Kept<DrawsMemory>;
+}
+
+/** A memory with nothing in it yet. */
+export function memory(): Memory {
+  return {
+    designs: kept(4000),
+    rows: kept(400),
+    piers: kept(2000),
+    supports: kept(2000),
+    sites: kept(6),
+    draws: kept(2),
+  };
+}
+
+/** What is kept of one site: nothing yet where it is seen for the first time. */
+export function siteMemory({ sites }: Memory, key: string): SiteMemory {
+  return remembered(sites, key, () => ({ proposals: kept(100), atDepth: kept(400), priced: kept(100) }));
+}

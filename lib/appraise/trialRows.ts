@@ -1,0 +1,143 @@
+import { formModule } from '../forms/index.ts';
+import type { Design, FormId, MeasuredLine, MethodId, Site } from '../model/index.ts';
+import { sideRatioWindow, spanWindow } from '../rules/index.ts';
+import { deckOnSupport } from '../substructure/index.ts';
+import { methodLines } from '../takeoff/index.ts';
+import { depthRange } from './depthRange.ts';
+import type { Kept } from './kept.ts';
+import { leastCostDepth } from './leastCostDepth.ts';
+import type { TrialRow } from './memory.ts';
+import type { Sizer } from './sizer.ts';
+import { finish, type Work } from './work.ts';
+
+/** Governing spans at which each form is really sized; in between the table is read off straight lines. */
+const TABLE_SPANS = 10;
+/** Shares of the governing span at which the shorter spans of a unit are sized with the depth of the longest. */
+export const SHARES = [0.5, 1] as const;
+/** Depths tried for each row before the two beside the best. */
+const TABLE_TRIALS = 3;
+/** Spans under this are culverts, m. */
+const LEAST_SPAN_M = 8;
+/** End over interior span of a trial unit: inside every published window. */
+const TRIAL_END_RATIO = 0.78;
+
+/** A form built by one method. */
+export interface FormAndMethod {
+  readonly form: FormId;
+  readonly method: MethodId;
+}
+
+/** Money of measured lines at one rate per item. */
+export type CostOf = (lines: readonly MeasuredLine[]) => number;
+
+const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.item === 'method-setup';
+
+/** A unit of ordinary proportions for one governing span: its spans, and its pylons where the form has them. */
+function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number[]; pylons?: number[] } {
+  const pattern = formModule(form).pattern;
+  if (pattern.kind === 'simple-main') return { spansM: [spanM] };
+  if (pattern.kind === 'continuous') {
+    return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
+  }
+  const [least, most] =
+    sideRatioWindow(form, pylons) ?? (pylons === 1 ? pattern.onePylonBack : pattern.twoPylonSide);
+  const side = ((least + most) / 2) * spanM;
+  return pylons === 1
+    ? { spansM: [spanM, side], pylons: [1] }
+    : { spansM: [side, spanM, side], pylons: [1, 2] };
+}
+
+/** Rows of one form and method: one for each of its spans, each sized when it is first read. */
+export interface TrialRows {
+  readonly spansM: readonly number[];
+  readonly row: (index: number) => TrialRow;
+  /** Sizes all rows, pausing after each trial. */
+  readonly all: () => Work<void>;
+}
+
+/** What rows are made from besides their form and method. */
+export interface RowMakers {
+  readonly site: Site;
+  readonly size: Sizer;
+  readonly costOf: CostOf;
+  readonly rows: Kept<TrialRow>;
+  /** Text of the books behind `costOf`. */
+  readonly booksKey: string;
+}
+
+/**
+ * Rows of one form and method over its possible band of spans on a crossing.
+ *
+ * @throws RangeError where no span of the form fits the crossing
+ */
+export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): TrialRows {
+  const { site, size, costOf, rows, booksKey } = makers;
+  const { possible } = spanWindow(form);
+  const least = Math.max(possible[0], LEAST_SPAN_M);
+  const most = Math.min(possible[1], site.lengthM);
+  if (!(least <= most)) {
+    throw new RangeError(`cost table: ${form} has no span that fits a crossing of ${site.lengthM} m`);
+  }
+  const spansM = Array.from(
+    { length: TABLE_SPANS },
+    (_, i) => least * Math.pow(most / least, i / (TABLE_SPANS - 1)),
+  );
+  const hung = formModule(form).pattern.kind === 'pylon';
+  const base = {
+    form,
+    method,
+    deck: site.deck,
+    standard: site.standard,
+    planRadiusM: site.planRadiusM ?? Infinity,
+  };
+
+  const sized = (
+    spanM: number,
+    depthM: number,
+    pylons: 1 | 2,
+  ): { design: Design; perM: number; fixed: number } => {
+    const unit = trialUnit(form, spanM, pylons);
+    const design = size({ ...base, depthM, ...unit });
+    const lines = [...design.lines, ...methodLines([design])];
+    const lengthM = unit.spansM.reduce((sum, span) => sum + span, 0);
+    return {
+      design,
+      perM: costOf(lines.filter((line) => !isFixed(line))) / lengthM,
+      fixed: costOf(lines.filter(isFixed)),
+    };
+  };
+
+  const made = function* (spanM: number): Work<TrialRow> {
+    const { spansM: trialSpans } = trialUnit(form, spanM, 1);
+    const depthM = yield* leastCostDepth(
+      depthRange(form, method, trialSpans, site.deck),
+      (trialM) => {
+        const { design, perM } = sized(spanM, trialM, 1);
+        return { cost: perM, utilisation: design.limitingCheck.utilisation };
+      },
+      TABLE_TRIALS,
+    );
+    const whole = sized(spanM, depthM, 1);
+    yield;
+    const perM = SHARES.map((share) =>
+      share === 1 || hung ? whole.perM : sized(share * spanM, depthM, 1).perM,
+    );
+    yield;
+    const fixed = hung ? [whole.fixed, whole.fixed, sized(spanM, depthM, 2).fixed] : [whole.fixed];
+    const { permanentKNm, trafficKNm } = deckOnSupport(whole.design);
+    return { depthM, perM, fixed, loadKNm: permanentKNm + trafficKNm };
+  };
+
+  const keyOf = (index: number): string => JSON.stringify([base, spansM[index], booksKey]);
+  const known: (TrialRow | undefined)[] = spansM.map((_, index) => rows.get(keyOf(index)));
+  const rowSteps = function* (index: number): Work<TrialRow> {
+    return (known[index] ??= rows.put(keyOf(index), yield* made(spansM[index]!)));
+  };
+  return {
+    spansM,
+    row: (index) => known[index] ?? finish(rowSteps(index)),
+    *all() {
+      for (const index of spansM.keys()) yield* rowSteps(index);
+    },
+  };
+}
