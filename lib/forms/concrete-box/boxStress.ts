@@ -1,4 +1,4 @@
-import { concrete } from '../../actions/index.ts';
+import { concrete, type TrafficEnvelope } from '../../actions/index.ts';
 import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
@@ -21,15 +21,24 @@ export interface Compressions {
   readonly freshTension: StressUse;
 }
 
+/** What stresses ask to know of a deck and of its tendons. */
+export type StressModel = Pick<BoxModel, 'standardId' | 'concrete' | 'superimposed' | 'pierShare'> & {
+  readonly traffic: { readonly most: Pick<TrafficEnvelope, 'momentMaxKNm' | 'momentMinKNm'> };
+};
+export type StressingTendons = Pick<
+  Tendons,
+  'share' | 'parasiticM' | 'eccentricityM' | 'forceKN' | 'initialKN' | 'straightKN' | 'straightInitialKN'
+>;
+
 /**
  * Stresses of the outer fibres under permanent load, with characteristic traffic, and when the tendons have just been
  * stressed with only the own weight acting, each against its share of the strength.
  */
 export function boxCompressions(
-  model: BoxModel,
-  sections: SectionsAlong,
-  own: OwnWeight,
-  tendons: Tendons,
+  model: StressModel,
+  sections: Pick<SectionsAlong, 'areaM2' | 'inertiaM4' | 'topM' | 'lowM'>,
+  own: Pick<OwnWeight, 'effects'>,
+  tendons: StressingTendons,
 ): Compressions {
   const { permanent, total, transfer, strengthAtTransfer } = boxData.compression;
   const fck = model.concrete.fckMPa;

@@ -1,20 +1,32 @@
 import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
+import type { BoxTraffic } from './boxTraffic.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import type { TendonGroup } from './tendonGroup.ts';
 import type { TendonLine } from './tendonLine.ts';
 
+/** What service asks to know of a deck. */
+export type ServiceModel = Pick<BoxModel, 'standardId' | 'concrete' | 'superimposed' | 'archedKNm'> & {
+  readonly task: Pick<BoxModel['task'], 'depthM'>;
+  readonly traffic: Pick<BoxTraffic, 'service'>;
+};
+
+/** Section properties along a deck, and the inertia by which its free curvature is judged. */
+export type ServiceSections = Pick<SectionsAlong, 'areaM2' | 'inertiaM4' | 'topM' | 'lowM'> & {
+  readonly span: { readonly inertiaM4: number };
+};
+
 /** Draped force of the heaviest span after all losses that service asks for along a given line of the tendons, kN; Infinity where none will do. */
 export function serviceNeed(
-  model: BoxModel,
-  sections: SectionsAlong,
-  own: OwnWeight,
-  group: TendonGroup,
+  model: ServiceModel,
+  sections: ServiceSections,
+  own: Pick<OwnWeight, 'effects'>,
+  group: Pick<TendonGroup, 'heightM'>,
   straightKN: number,
+  gradient: Omit<typeof boxData.gradient, 'source'> = boxData.gradient,
 ): (line: TendonLine) => number {
   const { service } = model.traffic;
-  const { gradient } = boxData;
   const spread = boxData.prestressSpread[model.standardId];
   const tension = boxData.serviceTensionMPa[model.standardId] * 1e3;
   // Stiffness times free curvature of the gradient with traffic.

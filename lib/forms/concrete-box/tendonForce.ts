@@ -11,13 +11,16 @@ export interface TendonStress {
   readonly lastingMPa: number;
 }
 
+/** What losses ask to know of a deck. */
+export type StressedDeck = Pick<BoxModel, 'standardId' | 'task' | 'lengthM' | 'concrete'>;
+
 /**
  * Losses of draped tendons. In continuous decks every tendon covers two spans, is stressed from both ends and laps with
  * those of the next pair, so that the force along the deck is the mean over one span; in a simple span the middle decides.
  * @param sagM drape between low and high point of the longest span, m
  * @param axialMPa mean compression of the concrete, for the elastic loss of tendons stressed one after the other
  */
-export function tendonStress(model: BoxModel, sagM: number, axialMPa: number): TendonStress {
+export function tendonStress(model: StressedDeck, sagM: number, axialMPa: number): TendonStress {
   const { frictionPerRad, wobbleRadPerM, seatingM, longTerm } = boxData.losses;
   const { eMPa, ultimateMPa } = materials.strand[model.standardId];
   const { spansM } = model.task;

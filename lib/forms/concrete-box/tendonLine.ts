@@ -1,5 +1,6 @@
 import { imposedCurvature } from '../../mechanics/index.ts';
 import type { BoxModel } from './boxModel.ts';
+import type { BoxSection } from './boxSection.ts';
 import type { Drape } from './leastForce.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import type { TendonGroup } from './tendonGroup.ts';
@@ -22,9 +23,9 @@ export interface TendonLine {
  * next call.
  */
 export function tendonLine(
-  model: BoxModel,
-  sections: SectionsAlong,
-  group: TendonGroup,
+  model: Pick<BoxModel, 'beam'>,
+  sections: Pick<SectionsAlong, 'topM'> & { readonly span: Pick<BoxSection, 'topM' | 'lowM'> },
+  group: Pick<TendonGroup, 'fromFaceM'>,
   { shapes, parasitic, share }: TendonShapes,
 ): (drape: Drape) => TendonLine {
   const { topM, lowM } = sections.span;
