@@ -13,6 +13,13 @@ const leftToRight = stages.map((name, i) => ({
 
 module.exports = {
   forbidden: [
+    {
+      name: 'nothing-hangs-on-explanations',
+      comment: 'explanations are made only when asked; no stage knows them',
+      severity: 'error',
+      from: { path: stages.concat(beside, ['actions', 'appraise']).map(stage) },
+      to: { path: stage('explain') },
+    },
     { name: 'no-circle', severity: 'error', from: {}, to: { circular: true } },
     ...leftToRight,
     {
