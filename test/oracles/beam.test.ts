@@ -1,6 +1,13 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { lineBeam, momentInfluence, pointLoads, reactionInfluence, settle, stepped } from '../../lib/mechanics/index.ts';
+import {
+  lineBeam,
+  momentInfluence,
+  pointLoads,
+  reactionInfluence,
+  settle,
+  stepped,
+} from '../../lib/mechanics/index.ts';
 import { denseBeam } from './denseBeam.ts';
 
 /** Random beams with a stiffness for every span, springs and settlements, solved again with the dense matrices of ml-matrix. */
@@ -23,7 +30,11 @@ function both(random: Case) {
     return sum + span;
   }, 0);
   const lengthM = ends[ends.length - 1]!;
-  const spanAt = (x: number): number => Math.max(0, ends.findIndex((end) => x < end));
+  const spanAt = (x: number): number =>
+    Math.max(
+      0,
+      ends.findIndex((end) => x < end),
+    );
   const springX = random.springAt * lengthM;
   const beam = lineBeam({
     spansM: random.spansM,

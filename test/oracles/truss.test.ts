@@ -80,8 +80,12 @@ describe('planeTruss() beside dense matrices', () => {
         );
         const theirs = dense(geometry, down);
         const scale = Math.max(1, ...theirs.members.map(Math.abs));
-        theirs.members.forEach((force, k) => expect(Math.abs(force - ours.memberKN[k]!) / scale).toBeLessThan(1e-8));
-        theirs.reactions.forEach((force, k) => expect(Math.abs(force - ours.reactionKN[k]!) / scale).toBeLessThan(1e-8));
+        theirs.members.forEach((force, k) =>
+          expect(Math.abs(force - ours.memberKN[k]!) / scale).toBeLessThan(1e-8),
+        );
+        theirs.reactions.forEach((force, k) =>
+          expect(Math.abs(force - ours.reactionKN[k]!) / scale).toBeLessThan(1e-8),
+        );
       }),
       { seed: 21, numRuns: 80 },
     );
