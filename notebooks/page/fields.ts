@@ -102,9 +102,13 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
     const isMine = (problem: Problem): boolean => entry.owns.some((path) => isWithin(problem.path, path));
     said.push(isMine);
     let isRefused = false;
-    const back = (): Way[] => {
+    const back = (draft: Study): Way[] => {
       if (!entry.has(store.valid())) return [];
       const good = entry.get(store.valid());
+      // Said here, but caused by a change elsewhere.
+      if (shown.words(good) === shown.words(entry.get(draft))) {
+        return [{ words: 'Undo the last change', take: store.undo }];
+      }
       const take = (): void => store.edit((study) => entry.put(study, good), { what: 'going back' });
       return [{ words: `Back to ${shown.words(good)}`, take }];
     };
@@ -113,7 +117,7 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
       shown.set(entry.get(draft), isPreset?.(draft) === true ? 'preset' : 'typed');
       const mine = problems.filter(isMine);
       if (mine.length > 0) {
-        shown.refuse(`${mine.map(say).join(' ')} The last valid study is kept.`, back());
+        shown.refuse(`${mine.map(say).join(' ')} The last valid study is kept.`, back(draft));
       } else if (isRefused) shown.refuse(null);
       isRefused = mine.length > 0;
     });

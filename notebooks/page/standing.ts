@@ -24,6 +24,8 @@ export function standing(
 ): { readonly element: HTMLElement; readonly end: () => void } {
   const element = h('div', { class: 'standing' });
   let fields: Fields | undefined;
+  /** Fields of earlier shapes of which one may still hold the focus: in step until it has gone. */
+  const earlier: Fields[] = [];
   /** The shape it was built for; undefined while a field of an older one still holds the focus. */
   let built: string | undefined;
   let draft = store.valid();
@@ -31,14 +33,15 @@ export function standing(
   const show = (): void => {
     const now = JSON.stringify(shape(draft));
     if (now === built) return;
-    const before = fields;
+    if (fields !== undefined) earlier.push(fields);
     fields = fieldsOf(graph, store, say);
     const isWhole = exchange(element, h('div', {}, build(draft, fields)));
-    before?.end();
     built = isWhole ? now : undefined;
+    if (isWhole) for (const one of earlier.splice(0)) one.end();
   };
   element.addEventListener('focusout', () => {
-    if (built === undefined) queueMicrotask(show);
+    // Once the focus has come to where it goes: that place has to be there still.
+    if (built === undefined) setTimeout(show);
   });
   const stop = graph.watch(store.draft, (state) => {
     if (state.state !== 'ready') return;
@@ -49,7 +52,7 @@ export function standing(
     element,
     end() {
       stop();
-      fields?.end();
+      for (const one of [...earlier, fields]) one?.end();
     },
   };
 }

@@ -1,0 +1,38 @@
+import type { Access, Obstacle, Road, StandardId } from '../../../lib/index.ts';
+import type { Choice } from '../../page/index.ts';
+
+/** Words of the choices in the brief. */
+export const obstacleKindChoices: readonly Choice<Obstacle['kind']>[] = [
+  { value: 'river', words: 'river' },
+  { value: 'railway', words: 'railway' },
+  { value: 'road', words: 'road' },
+  { value: 'bank', words: 'bank' },
+  { value: 'utility', words: 'utility' },
+  { value: 'heritage', words: 'heritage' },
+];
+
+export const supportChoices: readonly Choice<Obstacle['supports']>[] = [
+  { value: 'hard', words: 'barred' },
+  { value: 'soft', words: 'at a price' },
+  { value: 'none', words: 'free' },
+];
+
+export const fixedEndChoices: readonly Choice<Road['fixedEnd']>[] = [
+  { value: 'both', words: 'neither end' },
+  { value: 'start', words: 'the end' },
+  { value: 'end', words: 'the start' },
+  { value: 'none', words: 'either end' },
+];
+
+export const loadingChoices: readonly Choice<StandardId>[] = [
+  { value: 'lm1', words: 'EN 1991-2, LM1' },
+  { value: 'hl93', words: 'AASHTO HL-93' },
+];
+
+/** Yes, no, or not known, as a choice. */
+export type YesNo = 'yes' | 'no' | 'unknown';
+
+export const yesNoOf = (value: Access['crane']): YesNo =>
+  value === 'unknown' ? value : value ? 'yes' : 'no';
+
+export const fromYesNo = (value: YesNo): Access['crane'] => (value === 'unknown' ? value : value === 'yes');

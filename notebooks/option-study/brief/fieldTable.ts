@@ -1,0 +1,54 @@
+import { h, type HtmlChild } from '../../html.ts';
+
+/**
+ * Puts what fields say against their value below the row or drawing they stand in, each with the name of its field:
+ * a table cell is too narrow for a sentence. Takes no room while nothing is said.
+ */
+export function saidBelow(within: Element): HTMLElement {
+  const told = Array.from(within.querySelectorAll('.entry > .refusal'), (refusal) => {
+    const field = refusal.parentElement?.querySelector('[aria-label]');
+    return h('span', { class: 'told' }, h('b', {}, `${field?.getAttribute('aria-label') ?? ''}: `), refusal);
+  });
+  return h('div', { class: 'told-below' }, told);
+}
+
+/** A row of fields, and below it the row that says what is wrong in it. */
+export function fieldRow(cells: readonly HtmlChild[]): HTMLElement[] {
+  const row = h(
+    'tr',
+    { class: 'fields' },
+    cells.map((cell, i) => h(i === 0 ? 'th' : 'td', i === 0 ? { scope: 'row' } : {}, cell)),
+  );
+  return [row, h('tr', { class: 'told-row' }, h('td', { colspan: cells.length }, saidBelow(row)))];
+}
+
+/**
+ * A word that changes a list: add, take out. It keeps the focus when its list is drawn anew; where it goes with its
+ * entry, the focus goes to the last of its kind.
+ * @param key tells it from the other actions; up to the last point it is that of its kind
+ */
+export function listAction(words: string, name: string, key: string, act: () => void): HTMLElement {
+  const kind = key.slice(0, key.lastIndexOf('.'));
+  const button = h(
+    'button',
+    { type: 'button', class: 'action list', 'data-key': key, 'aria-label': name },
+    words,
+  );
+  button.addEventListener('click', () => {
+    const part = button.closest('.standing');
+    act();
+    if (part === null || button.ownerDocument.activeElement !== button.ownerDocument.body) return;
+    const others = Array.from(
+      part.querySelectorAll<HTMLElement>(`.action[data-key^="${CSS.escape(kind)}."]`),
+    );
+    others.at(-1)?.focus();
+  });
+  return button;
+}
+
+/** Gives the focus to the field of that key inside a part, where it stands. */
+export function focusField(within: Element, key: string): void {
+  const entry = within.querySelector(`[data-key="${CSS.escape(key)}"]`);
+  const field = entry?.querySelector('.fig') ?? entry;
+  if (field instanceof HTMLElement) field.focus();
+}

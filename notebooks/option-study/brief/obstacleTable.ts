@@ -1,0 +1,132 @@
+import type { Obstacle, Study } from '../../../lib/index.ts';
+import { h, type HtmlChild } from '../../html.ts';
+import { putAt, standing, type Fields, type Path, type StudyStore } from '../../page/index.ts';
+import type { Graph } from '../../reactive/index.ts';
+import { obstacleKindChoices, supportChoices } from './briefChoices.ts';
+import { clearanceState, withClearanceState, type ClearanceState } from './clearanceState.ts';
+import { fieldRow, focusField, listAction } from './fieldTable.ts';
+import { withEntry, withoutEntry } from './listEdits.ts';
+import { problemBeside } from './problemBeside.ts';
+
+const list: Path = ['brief', 'obstacles'];
+
+/** An obstacle that changes nothing until it is said where it lies and what it asks for: 10 m in the middle. */
+export function newObstacle({ brief }: Study): Obstacle {
+  const middleM = Math.round((brief.crossing.startM + brief.crossing.endM) / 2);
+  return {
+    kind: 'road',
+    name: `Obstacle ${brief.obstacles.length + 1}`,
+    fromM: middleM - 5,
+    toM: middleM + 5,
+    supports: 'none',
+    clearance: null,
+  };
+}
+
+function clearanceChoice(fields: Fields, index: number, name: string): HTMLElement {
+  return fields.choice<ClearanceState>(
+    {
+      key: `brief.obstacles.${index}.clearance`,
+      has: (study) => index < study.brief.obstacles.length,
+      get: (study) => clearanceState(study.brief.obstacles[index]!),
+      put: (study, state) =>
+        putAt(study, [...list, index], withClearanceState(study.brief, study.brief.obstacles[index]!, state)),
+      owns: [],
+    },
+    {
+      label: `envelope over ${name}`,
+      choices: [
+        { value: 'none', words: 'none' },
+        { value: 'preset', words: 'preset' },
+        { value: 'confirmed', words: 'confirmed' },
+      ],
+      isPreset: (draft) => (draft as Study).brief.obstacles[index]?.clearance?.confirmed === false,
+    },
+  );
+}
+
+function row(fields: Fields, store: StudyStore, obstacle: Obstacle, index: number): HTMLElement[] {
+  const at = (...rest: Path): Path => [...list, index, ...rest];
+  const named = `obstacle ${index + 1}`;
+  const metres = (what: string, places: number, ...rest: Path): HTMLElement =>
+    fields.figure(at(...rest), {
+      label: `${named}, ${what}`,
+      places,
+      unit: 'm',
+      step: places > 1 ? 0.1 : 1,
+      ...(rest.at(-1) === 'headroomM' && {
+        isPreset: (draft: unknown) => (draft as Study).brief.obstacles[index]?.clearance?.confirmed === false,
+        confirm: () =>
+          store.edit((study) => putAt(study, at('clearance', 'confirmed'), true), { what: 'confirming' }),
+      }),
+    });
+  const envelope =
+    obstacle.clearance === null
+      ? null
+      : [
+          metres('envelope from', 1, 'clearance', 'fromM'),
+          metres('envelope to', 1, 'clearance', 'toM'),
+          metres('envelope above level', 2, 'clearance', 'datumLevelM'),
+          metres('headroom', 2, 'clearance', 'headroomM'),
+        ];
+  const cells: HtmlChild[] = [
+    fields.words(at('name'), { label: `${named}, name`, most: 500 }),
+    fields.choice(at('kind'), { label: `${named}, kind`, choices: obstacleKindChoices }),
+    metres('from', 1, 'fromM'),
+    metres('to', 1, 'toM'),
+    fields.choice(at('supports'), { label: `${named}, supports`, choices: supportChoices }),
+    clearanceChoice(fields, index, named),
+    ...(envelope ?? ['–', '–', '–', '–']),
+    listAction('take out', `take out ${obstacle.name}`, `take.obstacles.${index}`, () =>
+      store.edit((study) => withoutEntry(study, list, index), { what: `taking out ${obstacle.name}` }),
+    ),
+  ];
+  return fieldRow(cells);
+}
+
+/** The obstacles of the crossing in a table: where each lies, whether supports may stand there, what must stay clear. */
+export function obstacleTable(graph: Graph, store: StudyStore): HTMLElement {
+  const { element } = standing(graph, store, {
+    say: problemBeside,
+    shape: ({ brief }) => brief.obstacles.map(({ clearance }) => clearance !== null),
+    build: ({ brief }, fields) => [
+      h(
+        'div',
+        { class: 'across' },
+        h(
+          'table',
+          { class: 'brief-table obstacles' },
+          h('caption', {}, 'Obstacles'),
+          h(
+            'thead',
+            {},
+            h(
+              'tr',
+              {},
+              ['', '', 'from', 'to', 'supports', 'envelope', 'from', 'to', 'above level', 'clear', ''].map(
+                (words) => h('th', { scope: 'col' }, words),
+              ),
+            ),
+          ),
+          h(
+            'tbody',
+            {},
+            brief.obstacles.map((obstacle, index) => row(fields, store, obstacle, index)),
+          ),
+        ),
+      ),
+      h(
+        'p',
+        { class: 'list-actions' },
+        listAction('Add an obstacle', 'Add an obstacle', 'add.obstacles', () => {
+          const at = brief.obstacles.length;
+          store.edit((study) => withEntry(study, list, at, newObstacle(study)), {
+            what: 'adding an obstacle',
+          });
+          focusField(element, `brief.obstacles.${at}.name`);
+        }),
+      ),
+    ],
+  });
+  return element;
+}
