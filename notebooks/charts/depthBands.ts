@@ -1,5 +1,5 @@
 import { scaleLog } from 'd3-scale';
-import { fixed, level } from '../format.ts';
+import { fixed, level, significant } from '../format.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
@@ -41,12 +41,9 @@ export interface DepthBandsInput {
   readonly prefix?: string;
 }
 
-const range = ([least, most]: readonly [number, number]): string => {
-  const places = most < 10 ? 1 : 0;
-  return least < 1
-    ? `${level(least)} to ${level(most)}`
-    : `${fixed(least, places)} to ${fixed(most, places)}`;
-};
+/** Two figures are all that a band of this kind bears. */
+const range = ([least, most]: readonly [number, number]): string =>
+  `${significant(least, 2)} to ${significant(most, 2)}`;
 
 /** Bar of one band with a tick at the depth taken. */
 function bandBar(form: FormId, band: DepthBandRow, y: number, x: (m: number) => number, ink: FormInk): Piece {
@@ -89,7 +86,7 @@ export function depthBands(input: DepthBandsInput): Piece {
   const right = narrow ? widthPx : widthPx * 0.56;
   const figureX = right + 24;
   const ratioX = figureX + 92;
-  const sourcesX = ratioX + 168;
+  const sourcesX = ratioX + 210;
   const all = forms.flatMap(({ bands }) =>
     bands.flatMap(({ depthM, takenM }) => [...depthM, takenM ?? depthM[0]]),
   );

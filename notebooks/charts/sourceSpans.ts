@@ -33,6 +33,8 @@ export interface SourceSpansInput {
     readonly spans: readonly SourceSpan[];
   }[];
   readonly askedM: number;
+  /** Ends of the span axis, m: the same for charts that stand below each other. */
+  readonly axisM: readonly [from: number, to: number];
   readonly widthPx: number;
   readonly paper?: Paper;
   readonly prefix?: string;
@@ -87,6 +89,18 @@ function spanLine(span: SourceSpan, y: number, x: (m: number) => number, colour:
   );
 }
 
+/** The ends a span axis needs to hold what sources say, the rules and the asked span, m. */
+export function sourceAxis(
+  forms: SourceSpansInput['forms'],
+  askedM: number,
+): readonly [from: number, to: number] {
+  const ends = forms.flatMap(({ usual, spans }) => [
+    ...usual,
+    ...spans.flatMap(({ fromM, toM }) => [fromM, toM].filter((end) => end !== null)),
+  ]);
+  return [Math.min(5, askedM, ...ends), Math.max(askedM, ...ends) * 1.05];
+}
+
 /** Each source's span of each form, one line each, over the range that the rules take as usual. */
 export function sourceSpans(input: SourceSpansInput): Piece {
   const { forms, askedM, widthPx } = input;
@@ -100,14 +114,10 @@ export function sourceSpans(input: SourceSpansInput): Piece {
   const right = narrow ? widthPx : widthPx * 0.64;
   const numberX = narrow ? 0 : right + 18;
   const wordsX = numberX + (narrow ? 22 : 26);
-  const ends = forms.flatMap(({ usual, spans }) => [
-    ...usual,
-    ...spans.flatMap(({ fromM, toM }) => [fromM ?? [], toM ?? []].flat()),
-  ]);
-  const scale = scaleLog([Math.min(5, askedM, ...ends), Math.max(askedM, ...ends) * 1.05], [left, right]);
+  const scale = scaleLog(input.axisM, [left, right]);
   const x = (m: number): number => scale(m);
   const ticks = [5, 10, 20, 50, 100, 200, 500, 1000, 2000].filter(
-    (m) => m <= scale.domain()[1]! && (!narrow || m !== 10),
+    (m) => m >= input.axisM[0] && m <= input.axisM[1] && (!narrow || m !== 10),
   );
   const head = 32;
   const words = forms.map(({ spans }) =>
@@ -117,7 +127,7 @@ export function sourceSpans(input: SourceSpansInput): Piece {
   const lineHeights = words.map((lines) =>
     lines.map((text) => (narrow ? 27 : Math.max(15, wrapText(text, widthPx - wordsX, size).length * 15))),
   );
-  const rowHeights = lineHeights.map((lines) => lines.reduce((sum, one) => sum + one, narrow ? 34 : 14));
+  const rowHeights = lineHeights.map((lines) => lines.reduce((sum, one) => sum + one, narrow ? 42 : 14));
   const tops = rowHeights.map((_, at) => head + rowHeights.slice(0, at).reduce((sum, one) => sum + one, 0));
   const bottom = head + rowHeights.reduce((sum, one) => sum + one, 0);
 
@@ -126,9 +136,9 @@ export function sourceSpans(input: SourceSpansInput): Piece {
     forms.map(({ form, usual }, index) =>
       el('rect', {
         x: x(usual[0]),
-        y: (tops[index] ?? head) + (narrow ? 26 : 4),
+        y: (tops[index] ?? head) + (narrow ? 25 : 4),
         width: x(usual[1]) - x(usual[0]),
-        height: (rowHeights[index] ?? 0) - (narrow ? 32 : 8),
+        height: narrow ? 8 : (rowHeights[index] ?? 0) - 8,
         fill: ink.face(form),
         stroke: ink.barEdge(form),
         'stroke-width': pens.fine,
@@ -152,7 +162,7 @@ export function sourceSpans(input: SourceSpansInput): Piece {
         glyph(form, 0, top + 6, ink.line(form)),
         label(42, top + 18.5, formLooks[form].short, { size: letters.table, halo: narrow }),
         spans.map((span, at) => {
-          const y = top + (narrow ? 36 : 14.5) + heights.slice(0, at).reduce((sum, one) => sum + one, 0);
+          const y = top + (narrow ? 42 : 14.5) + heights.slice(0, at).reduce((sum, one) => sum + one, 0);
           const text = words[index]?.[at] ?? '';
           return g(
             {},

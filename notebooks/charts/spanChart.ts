@@ -3,7 +3,7 @@ import { fixed, length } from '../format.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
-import { wrapText } from '../drawing/lettering.ts';
+import { textWidth, wrapText } from '../drawing/lettering.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
@@ -96,15 +96,30 @@ export function spanAxis(rows: readonly SpanRow[], askedM: number | null): reado
   return [Math.min(5, ...known), Math.max(100, ...known) * 1.05];
 }
 
-/** The words of a row broken into lines; what it takes to stand otherwise comes last, in second ink. */
-function linesOf(row: SpanRow, widthPx: number, size: number): readonly { text: string; second: boolean }[] {
-  return [
-    ...wrapText(row.words, widthPx, size).map((text) => ({ text, second: false })),
-    ...(row.flip === undefined
-      ? []
-      : wrapText(row.flip, widthPx, size).map((text) => ({ text, second: true }))),
-  ];
+interface RowLine {
+  readonly text: string;
+  readonly second: boolean;
+  /** Right of the start of the words, px. */
+  readonly dx: number;
+  readonly line: number;
 }
+
+/**
+ * The words of a row broken into lines; what it takes to stand otherwise follows in second ink, behind them where they
+ * and it fit one line, else below.
+ */
+function linesOf({ words, flip }: SpanRow, widthPx: number, size: number): readonly RowLine[] {
+  const said = wrapText(words, widthPx, size);
+  const lines = said.map((text, line) => ({ text, second: false, dx: 0, line }));
+  if (flip === undefined) return lines;
+  const dx = textWidth(`${words}  `, size);
+  if (said.length === 1 && dx + textWidth(flip, size) <= widthPx)
+    return [...lines, { text: flip, second: true, dx, line: 0 }];
+  const below = wrapText(flip, widthPx, size);
+  return [...lines, ...below.map((text, at) => ({ text, second: true, dx: 0, line: said.length + at }))];
+}
+
+const lineCount = (lines: readonly RowLine[]): number => Math.max(0, ...lines.map(({ line }) => line + 1));
 
 /** Forms against span on a log axis, each in, possible or out in words with the number that decides. */
 export function spanChart(input: SpanChartInput): Piece {
@@ -119,7 +134,7 @@ export function spanChart(input: SpanChartInput): Piece {
   const left = narrow ? Math.max(130, widthPx * 0.36) : Math.max(190, Math.min(232, widthPx * 0.235));
   const right = narrow ? widthPx - 62 : Math.min(left + 400, widthPx * 0.62);
   const statusX = narrow ? widthPx : right + 26;
-  const wordsX = statusX + 56;
+  const wordsX = statusX + 62;
   const [low, high] = input.axisM ?? spanAxis(rows, askedM);
   const scale = scaleLog([low, high], [left, right]);
   const x = (m: number): number => scale(m);
@@ -130,10 +145,12 @@ export function spanChart(input: SpanChartInput): Piece {
   const lettering = rows.map((row) =>
     narrow ? linesOf(row, widthPx - nameX, letters.drawing) : linesOf(row, widthPx - wordsX, letters.table),
   );
-  const heights = lettering.map(({ length: lines }) =>
-    narrow ? 25 + lines * 13 : Math.max(25, 9 + lines * 16),
+  const heights = lettering.map((lines) =>
+    narrow ? 25 + lineCount(lines) * 13 : Math.max(25, 9 + lineCount(lines) * 16),
   );
   const tops = heights.map((_, index) => head + heights.slice(0, index).reduce((sum, one) => sum + one, 0));
+  const middleOf = (index: number): number =>
+    (tops[index] ?? head) + (narrow ? 13 : (heights[index] ?? 25) / 2);
   const bottom = head + heights.reduce((sum, one) => sum + one, 0);
   const foot = bottom + 20;
   const hasStatistics = rows.some((row) => row.statistics !== undefined);
@@ -147,10 +164,12 @@ export function spanChart(input: SpanChartInput): Piece {
       gridUprights(ticks.map(x), head - 6, bottom),
       ticks.map((m) => label(x(m), head - 10, fixed(m, 0), { anchor: 'middle', fill: colours.second })),
       !narrow && label(left - 12, head - 10, 'span, m', { anchor: 'end', fill: colours.second }),
+      rows.map((row, index) => bars(row, middleOf(index), x, ink)),
+      // Over the bars, under the lettering.
+      askedM !== null &&
+        limitLine(x(askedM), 2, bottom, input.askedWords ?? `${length(askedM)} m asked`, ink.accent, widthPx),
       rows.map((row, index) => {
-        const top = tops[index] ?? head;
-        const height = heights[index] ?? 25;
-        const y = narrow ? top + 13 : top + height / 2;
+        const y = middleOf(index);
         const out = row.status === 'out';
         const ownInk = out ? colours.third : colours.ink;
         const before = rows[index - 1];
@@ -160,21 +179,20 @@ export function spanChart(input: SpanChartInput): Piece {
             ? before.status !== row.status
             : familyOf[before.form] !== familyOf[row.form]);
         const lines = lettering[index] ?? [];
-        const wordsY = narrow ? y + 18 : y + 4.5 - (lines.length - 1) * 8;
+        const wordsY = narrow ? y + 18 : y + 4.5 - (lineCount(lines) - 1) * 8;
         return g(
           { class: `form ${row.status}` },
-          index > 0 && levelLine(0, widthPx, top, newGroup),
+          index > 0 && levelLine(0, widthPx, tops[index] ?? head, newGroup),
           glyph(row.form, 0, y - 8, out ? colours.rule : ink.line(row.form)),
           label(nameX, y + 4.5, formLooks[row.form].short, { size: letters.table, fill: ownInk }),
-          bars(row, y, x, ink),
           label(statusX, y + 4.5, row.status, {
             size: letters.table,
             weight: out ? 400 : 600,
             fill: ownInk,
             anchor: narrow ? 'end' : 'start',
           }),
-          lines.map(({ text, second }, at) =>
-            label(narrow ? nameX : wordsX, wordsY + at * (narrow ? 13 : 16), text, {
+          lines.map(({ text, second, dx, line }) =>
+            label((narrow ? nameX : wordsX) + dx, wordsY + line * (narrow ? 13 : 16), text, {
               size: narrow ? letters.drawing : letters.table,
               fill: out ? colours.third : narrow || second ? colours.second : colours.ink,
               halo: narrow,
@@ -182,8 +200,6 @@ export function spanChart(input: SpanChartInput): Piece {
           ),
         );
       }),
-      askedM !== null &&
-        limitLine(x(askedM), 2, bottom, input.askedWords ?? `${length(askedM)} m asked`, ink.accent, widthPx),
       label(narrow ? 0 : left, foot, 'thick: usual range', { fill: colours.second }),
       label(narrow ? 110 : left + 108, foot, 'thin: possible', { fill: colours.second }),
       hasStatistics &&

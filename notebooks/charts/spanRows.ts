@@ -19,15 +19,19 @@ function turnAt({ from, to }: Turn): { readonly words: string; readonly byM: num
   };
 }
 
+/** '28 m longer', or 'if any longer' where the limit is reached. */
+const byWords = (byM: number, which: string): string =>
+  byM < 0.05 ? `if any ${which}` : `${plain(byM)} m ${which}`;
+
 /** What has to change for a form to stand otherwise, by the fact that changes. */
 const turns: Readonly<Record<string, (turn: Turn) => string>> = {
   mainSpanM(turn) {
     const { words, byM } = turnAt(turn);
-    return `${words}, ${plain(byM)} m ${turn.to > turn.from ? 'longer' : 'shorter'}`;
+    return `${words}, ${byWords(byM, turn.to > turn.from ? 'longer' : 'shorter')}`;
   },
   deckWidthM(turn) {
     const { words, byM } = turnAt(turn);
-    return `${words} of deck, ${plain(byM)} m ${turn.to > turn.from ? 'wider' : 'narrower'}`;
+    return `${words} of deck, ${byWords(byM, turn.to > turn.from ? 'wider' : 'narrower')}`;
   },
   planRadiusM: ({ from, to }) =>
     `at a plan radius of ${fixed(to, 0)} m, ${fixed(Math.abs(to - from), 0)} m ${to > from ? 'flatter' : 'tighter'}`,
@@ -47,6 +51,9 @@ export function flipWords({ flip }: Pick<GuideForm, 'flip'>): string | undefined
   return `${flip.becomes} ${turn(flip)}`;
 }
 
+/** Keeps figure and unit on one line. */
+const unbroken = (words: string): string => words.replace(/(\d) (m)\b/gu, '$1\u00a0$2');
+
 /** Rows of the span chart for an answer, forms in the order given. */
 export const spanRows = (guide: Guide, order: readonly FormId[]): readonly SpanRow[] =>
   order.map((form) => {
@@ -62,7 +69,7 @@ export const spanRows = (guide: Guide, order: readonly FormId[]): readonly SpanR
         ? {}
         : { statistics: [built.p5, built.p50, built.p95] as const, bridges: built.count }),
       status: answer.status,
-      words: answer.because.join('; '),
-      ...(flip === undefined ? {} : { flip }),
+      words: unbroken(answer.because.join('; ')),
+      ...(flip === undefined ? {} : { flip: unbroken(flip) }),
     };
   });

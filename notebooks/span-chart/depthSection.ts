@@ -1,4 +1,4 @@
-import { depthGuidance, type FormId, type GuideForm } from '../../lib/index.ts';
+import { depthGuidance, formIds, type FormId, type GuideForm } from '../../lib/index.ts';
 import { depthBands, depthTable, type DepthBandRow, type DepthBandsInput } from '../charts/depthBands.ts';
 import { tableBehind } from '../charts/table.ts';
 import { length } from '../format.ts';
@@ -35,11 +35,12 @@ function bandsOf(form: FormId, question: Question, { depthM }: GuideForm): reado
   });
 }
 
-/** What published notes add to the bands, by form. */
+/** What published notes add to the bands, by form, in family order. */
 function notesOn(forms: readonly FormId[], question: Question): readonly { form: FormId; note: string }[] {
-  return forms.flatMap((form) => {
+  return formIds.flatMap((form) => {
+    if (!forms.includes(form)) return [];
     const notes = new Set(depthGuidance(form, taskOf(question)).flatMap(({ note }) => note ?? []));
-    return [...notes].map((note) => ({ form, note }));
+    return notes.size === 0 ? [] : [{ form, note: [...notes].join(' ') }];
   });
 }
 

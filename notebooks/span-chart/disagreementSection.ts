@@ -1,5 +1,5 @@
-import { formIds, spanSources, spanWindow } from '../../lib/index.ts';
-import { sourceSpans, sourceSpansTable, type SourceSpansInput } from '../charts/sourceSpans.ts';
+import { familyOf, formIds, spanSources, spanWindow, type Family } from '../../lib/index.ts';
+import { sourceAxis, sourceSpans, sourceSpansTable, type SourceSpansInput } from '../charts/sourceSpans.ts';
 import { tableBehind } from '../charts/table.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
@@ -16,6 +16,14 @@ const forms: SourceSpansInput['forms'] = formIds.map((form) => ({
     ...(of === undefined ? {} : { of }),
   })),
 }));
+
+/** Families that stand in one chart; more would be higher than a printed sheet. */
+const together: readonly (readonly Family[])[] = [
+  ['slab', 'girder'],
+  ['box', 'truss'],
+  ['arch', 'cable-supported'],
+];
+const parts = together.map((names) => forms.filter(({ form }) => names.includes(familyOf[form])));
 
 /** Section 3: each source's span of each form, beside the others. */
 export function disagreementSection(page: Sheet, cells: AnswerCells): LineSection {
@@ -35,10 +43,15 @@ export function disagreementSection(page: Sheet, cells: AnswerCells): LineSectio
           const input: SourceSpansInput = {
             forms,
             askedM: v.answer.span,
+            axisM: sourceAxis(forms, v.answer.span),
             widthPx: room.widthPx,
-            prefix: 'sources',
           };
-          return [sourceSpans(input), tableBehind(sourceSpansTable(input))];
+          return [
+            parts.map((part, index) =>
+              sourceSpans({ ...input, forms: part, prefix: `sources-${String(index)}` }),
+            ),
+            tableBehind(sourceSpansTable(input)),
+          ];
         },
         notes: [
           h(

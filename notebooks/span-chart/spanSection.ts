@@ -62,6 +62,7 @@ export function spanSection(page: Sheet, graph: Graph, cells: AnswerCells): Line
         station: '1+020',
         title: 'How far forms span',
         wide: true,
+        long: true,
         shows: { answer, order },
         owns: [answer],
         body: (v, room) => {

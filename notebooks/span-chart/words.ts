@@ -2,9 +2,11 @@ import {
   builtShares,
   type BuiltBucket,
   type DepthGuidance,
+  type FormId,
   type Guide,
   type Status,
 } from '../../lib/index.ts';
+import { flipWords } from '../charts/spanRows.ts';
 import { fixed, length, listed, plain } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
 
@@ -29,8 +31,14 @@ export const countWords = (count: number): string => small[count] ?? String(coun
 
 const capital = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
 
+/** A form's name inside a sentence: 'composite I'. */
+const inText = (form: FormId): string => {
+  const { short } = formLooks[form];
+  return `${short.charAt(0).toLowerCase()}${short.slice(1)}`;
+};
+
 const namesOf = (guide: Guide, status: Status): readonly string[] =>
-  guide.forms.filter((one) => one.status === status).map(({ form }) => formLooks[form].short.toLowerCase());
+  guide.forms.filter((one) => one.status === status).map(({ form }) => inText(form));
 
 /** The answer in a sentence: which forms are in, and how many are possible and out. */
 export function answerWords(guide: Guide): string {
@@ -42,15 +50,15 @@ export function answerWords(guide: Guide): string {
   return `${capital(listed(inside))} ${inside.length === 1 ? 'is' : 'are'} in; ${rest}`;
 }
 
-/** Nearest end of the usual range over the forms that are in: what changes first when the span does. */
+/** What changes first when the span does. */
 export function firstTurnWords(guide: Guide): string {
-  const turns = guide.forms.flatMap(({ form, flip }) =>
-    flip?.fact === 'mainSpanM' ? [{ form, flip, by: Math.abs(flip.to - flip.from) }] : [],
+  const turns = guide.forms.flatMap((one) =>
+    one.flip?.fact === 'mainSpanM' ? [{ one, byM: Math.abs(one.flip.to - one.flip.from) }] : [],
   );
-  const first = turns.sort((a, b) => a.by - b.by)[0];
-  if (first === undefined) return 'No change of the span alone changes a standing.';
-  const { form, flip, by } = first;
-  return `First to change: ${formLooks[form].short.toLowerCase()} is ${flip.becomes} once the span is ${plain(by)} m ${flip.to > flip.from ? 'longer' : 'shorter'}.`;
+  const first = turns.sort((a, b) => a.byM - b.byM)[0];
+  return first === undefined
+    ? 'No change of the span alone changes a standing.'
+    : `First to change: ${inText(first.one.form)}, ${flipWords(first.one) ?? ''}.`;
 }
 
 /** One over a ratio: 0.04 -> '1/25', 0.0667 -> '1/15', 0.1429 -> '1/7'. */
@@ -58,7 +66,7 @@ const oneOver = (ratio: number): string => `1/${plain(Number((1 / ratio).toFixed
 
 /** A band of depth as a ratio in words: '1/25 to 1/20 of the span', with what else is to be said of it. */
 export function ratioWords({ ratio, of, method, leastM }: DepthGuidance): string {
-  const least = leastM === undefined ? '' : `; under ${fixed(leastM, 2)} m nobody can get through it`;
+  const least = leastM === undefined ? '' : `; at least ${fixed(leastM, 2)} m for access`;
   const only = method === undefined ? '' : method === 'launch' ? ', launched' : `, ${method}`;
   return `${oneOver(ratio[0])} to ${oneOver(ratio[1])} of the ${of}${only}${least}`;
 }

@@ -1,4 +1,7 @@
+import type { DepthBandsInput } from '../../notebooks/charts/depthBands.ts';
 import type { QuantityColumn, PublishedBand } from '../../notebooks/charts/quantityMarks.ts';
+import type { ShareColumnsInput } from '../../notebooks/charts/shareColumns.ts';
+import type { SourceSpansInput } from '../../notebooks/charts/sourceSpans.ts';
 import type { SpanRow } from '../../notebooks/charts/spanChart.ts';
 import type { Measure } from '../../notebooks/charts/tradeOffs.ts';
 import type { Check } from '../../lib/model/index.ts';
@@ -193,3 +196,93 @@ export const measures: readonly Measure[] = [
     },
   },
 ];
+
+export const depthForms: DepthBandsInput['forms'] = [
+  {
+    form: 'half-through',
+    bands: [
+      {
+        what: 'edge girder depth',
+        depthM: [3.5, 5.2],
+        ratio: '1/18 to 1/12 of the span',
+        isUnderRoad: false,
+        sources: [{ number: 9, read: false }],
+      },
+      {
+        what: 'floor depth',
+        depthM: [0.9, 1.6],
+        ratio: '1/14 to 1/8 of the deck width',
+        takenM: 1.2,
+        isUnderRoad: true,
+        sources: [{ number: 9, read: false }],
+      },
+    ],
+  },
+  {
+    form: 'cantilever-box',
+    bands: [
+      {
+        what: 'depth at the support',
+        depthM: [3.2, 3.9],
+        ratio: '1/20 to 1/16 of the span',
+        takenM: 3.5,
+        isUnderRoad: false,
+        sources: [
+          { number: 24, read: true },
+          { number: 25, read: false },
+        ],
+      },
+      {
+        what: 'midspan depth',
+        depthM: [1.3, 2.1],
+        ratio: '1/50 to 1/30 of the span; at least 2.20 m for access and inspection inside the box',
+        takenM: 2.2,
+        isUnderRoad: true,
+        sources: [{ number: 24, read: true }],
+      },
+    ],
+  },
+];
+
+export const sourceForms: SourceSpansInput['forms'] = [
+  {
+    form: 'slab',
+    usual: [8, 22],
+    spans: [
+      { fromM: 6, toM: 15, of: 'reinforced or prestressed', source: { number: 1, read: true } },
+      { fromM: null, toM: 18, source: { number: 2, read: true } },
+      { fromM: 14, toM: 26, of: 'prestressed', source: { number: 3, read: false } },
+    ],
+  },
+  {
+    form: 'composite-box',
+    usual: [40, 95],
+    spans: [
+      { fromM: 37, toM: null, of: 'advantageous from here', source: { number: 4, read: true } },
+      { fromM: 50, toM: 150, source: { number: 5, read: false } },
+    ],
+  },
+];
+
+const column = (fromM: number, toM: number, count: number, percent: Record<string, number>) => ({
+  fromM,
+  toM,
+  count,
+  percent,
+  doubted: fromM === 100 ? ['steel-i'] : [],
+});
+const columns = [
+  column(0, 30, 1200, { slab: 31.5, 'steel-i': 12, tee: 4.2 }),
+  column(30, 50, 3400, { slab: 0.3, 'steel-i': 38 }),
+  column(50, 100, 2200, { 'steel-i': 71.2, tee: 0.8 }),
+  column(100, 200, 240, { 'steel-i': 22 }),
+];
+export const shares: Omit<ShareColumnsInput, 'widthPx'> = {
+  classes: [
+    { id: 'slab', words: 'slab', form: 'slab' },
+    { id: 'tee', words: 'tee', form: null },
+    { id: 'steel-i', words: 'steel I-girder', form: 'composite-i' },
+  ],
+  buckets: columns,
+  asked: columns[2]!,
+};

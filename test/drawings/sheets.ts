@@ -1,11 +1,14 @@
 import { checkBars } from '../../notebooks/charts/checkBars.ts';
 import { costByPart } from '../../notebooks/charts/costByPart.ts';
 import { costIntervals } from '../../notebooks/charts/costIntervals.ts';
+import { depthBands } from '../../notebooks/charts/depthBands.ts';
 import { depthCurve } from '../../notebooks/charts/depthCurve.ts';
 import { oddsMatrix } from '../../notebooks/charts/oddsMatrix.ts';
 import { quantityMarks } from '../../notebooks/charts/quantityMarks.ts';
 import { rangePanels } from '../../notebooks/charts/rangePanels.ts';
 import { byCost } from '../../notebooks/charts/rowHead.ts';
+import { shareColumns } from '../../notebooks/charts/shareColumns.ts';
+import { sourceAxis, sourceSpans } from '../../notebooks/charts/sourceSpans.ts';
 import { spanChart } from '../../notebooks/charts/spanChart.ts';
 import { tradeOffs } from '../../notebooks/charts/tradeOffs.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
@@ -26,7 +29,16 @@ import { glyph } from '../../notebooks/forms/glyph.ts';
 import { hatchId, hatches } from '../../notebooks/forms/hatch.ts';
 import { optionNumber } from '../../notebooks/forms/optionNumber.ts';
 import { formIds } from '../../lib/model/index.ts';
-import { checks, depthPoints, measures, published, spanRows } from './figures.ts';
+import {
+  checks,
+  depthForms,
+  depthPoints,
+  measures,
+  published,
+  shares,
+  sourceForms,
+  spanRows,
+} from './figures.ts';
 import { budget, obstacles, options, site, standing } from './fixture.ts';
 
 const second = options[1]!;
@@ -97,6 +109,23 @@ export const sheets: Readonly<Record<string, () => Piece>> = {
   'span-chart': () =>
     spanChart({ rows: spanRows, askedM: 63, askedWords: '63 m asked: 60 clear, plus a pier', widthPx: 980 }),
   'span-chart-narrow': () => spanChart({ rows: spanRows, askedM: 63, widthPx: 358 }),
+  'span-chart-by-fit': () =>
+    spanChart({
+      rows: spanRows.slice(4, 9),
+      askedM: 63,
+      groups: 'status',
+      axisM: [4, 2000],
+      widthPx: 1224,
+      paper: 'black',
+    }),
+  'depth-bands': () => depthBands({ forms: depthForms, spanM: 63, widthPx: 1224 }),
+  'depth-bands-narrow': () => depthBands({ forms: depthForms, spanM: 63, widthPx: 358 }),
+  'source-spans': () =>
+    sourceSpans({ forms: sourceForms, askedM: 63, axisM: sourceAxis(sourceForms, 63), widthPx: 1224 }),
+  'source-spans-narrow': () =>
+    sourceSpans({ forms: sourceForms, askedM: 63, axisM: sourceAxis(sourceForms, 63), widthPx: 358 }),
+  'share-columns': () => shareColumns({ ...shares, widthPx: 1224 }),
+  'share-columns-narrow': () => shareColumns({ ...shares, widthPx: 358, paper: 'black' }),
   'depth-curve': () =>
     depthCurve({
       form: 'composite-i',
