@@ -79,7 +79,12 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
   };
 
   const tableFor = (asked: FormAndMethod): CostTable => {
-    const rowsBy = (form: FormId): TrialRows => rowsFor(form === asked.form ? asked : usual(form));
+    const byForm = new Map<FormId, TrialRows>();
+    const rowsBy = (form: FormId): TrialRows => {
+      let rows = byForm.get(form);
+      if (!rows) byForm.set(form, (rows = rowsFor(form === asked.form ? asked : usual(form))));
+      return rows;
+    };
     const read = (form: FormId, spanM: number, value: (row: TrialRow) => number): number => {
       const rows = rowsBy(form);
       const [i, share] = between(rows.spansM, spanM);

@@ -3,7 +3,7 @@ import { billParts } from '../model/index.ts';
 import type { Draws } from './drawDrivers.ts';
 import type { RateDraws } from './drawRates.ts';
 import { driverData } from './drivers.ts';
-import { quantileOf } from './quantile.ts';
+import { quantileOf, quantilesOf } from './quantile.ts';
 import { halfSigmas } from './rates.ts';
 
 /** What an option costs on the draws of the study, money. */
@@ -42,17 +42,17 @@ export function priceOption(
     if (found === undefined) parts.set(part, (found = new Float64Array(n)));
     return found;
   };
+  const F = new Float64Array(n);
   for (const group of groupLines(option)) {
     const P = partOf(group.part);
     const factor = factorOf(group, option, draws);
+    F.fill(0);
     for (const [item, quantity] of group.items) {
-      const R = rateOf(rates, item);
-      if (factor === null) for (let k = 0; k < n; k++) P[k] = P[k]! + quantity * R[k]!;
-      else for (let k = 0; k < n; k++) P[k] = P[k]! + quantity * R[k]! * factor[k]!;
+      addTimes(factor === null ? P : F, quantity, rateOf(rates, item));
     }
+    if (factor !== null) addProduct(P, F, factor);
   }
   const first = option.supports[0]?.chainageM ?? 0;
-  const F = new Float64Array(n);
   for (const support of option.supports) {
     const C = draws.ground[support.stretch];
     const L = draws.localGround[Math.floor((support.chainageM - first) / driverData.localGround.everyM)];
@@ -63,12 +63,8 @@ export function priceOption(
     }
     for (const [part, items] of foundationItems(support)) {
       F.fill(0);
-      for (const [item, byClass] of items) {
-        const R = rateOf(rates, item);
-        for (let k = 0; k < n; k++) F[k] = F[k]! + byClass[C[k]!]! * R[k]!;
-      }
-      const P = partOf(part);
-      for (let k = 0; k < n; k++) P[k] = P[k]! + F[k]! * L[k]!;
+      for (const [item, byClass] of items) addByClass(F, byClass, C, rateOf(rates, item));
+      addProduct(partOf(part), F, L);
     }
   }
   if (privateError !== null) {
@@ -79,20 +75,14 @@ export function priceOption(
     const P = parts.get(part);
     if (P !== undefined) for (let k = 0; k < n; k++) totals[k] = totals[k]! + P[k]!;
   }
-  const scratch = totals.slice();
-  const cost = {
-    p10: quantileOf(scratch, 0.1),
-    p50: quantileOf(scratch, 0.5),
-    p90: quantileOf(scratch, 0.9),
-  };
-  const quartiles: [number, number] = [quantileOf(scratch, 0.25), quantileOf(scratch, 0.75)];
+  const [p10, q1, p50, q3, p90] = quantilesOf(totals, [0.1, 0.25, 0.5, 0.75, 0.9]) as Quantiles;
   const approaches = parts.get('approaches');
-  const without = totals.slice();
+  const without = Float64Array.from(totals);
   if (approaches !== undefined) for (let k = 0; k < n; k++) without[k] = without[k]! - approaches[k]!;
   return {
     totals,
-    cost,
-    quartiles,
+    cost: { p10, p50, p90 },
+    quartiles: [q1, q3],
     parts: billParts.flatMap((part) => {
       const P = parts.get(part);
       return P === undefined ? [] : [{ part, p50: quantileOf(P, 0.5) }];
@@ -100,6 +90,23 @@ export function priceOption(
     withoutApproachesP50: quantileOf(without, 0.5),
   };
 }
+
+/** T + quantity R in each draw. */
+function addTimes(T: Float64Array, quantity: number, R: Float64Array): void {
+  for (let k = 0; k < T.length; k++) T[k] = T[k]! + quantity * R[k]!;
+}
+
+/** T + A B in each draw. */
+function addProduct(T: Float64Array, A: Float64Array, B: Float64Array): void {
+  for (let k = 0; k < T.length; k++) T[k] = T[k]! + A[k]! * B[k]!;
+}
+
+/** T + quantity R in each draw, the quantity being that of the class drawn. */
+function addByClass(T: Float64Array, byClass: Float64Array, C: Uint8Array, R: Float64Array): void {
+  for (let k = 0; k < T.length; k++) T[k] = T[k]! + byClass[C[k]!]! * R[k]!;
+}
+
+type Quantiles = [p10: number, q1: number, p50: number, q3: number, p90: number];
 
 /** Lines of one part that share a factor: the model error of a form, the months, or none. */
 interface Group {
@@ -142,8 +149,9 @@ function factorOf(group: Group, option: Priceable, draws: Draws): Float64Array |
   }
   if (!group.monthly) return null;
   const { low, high } = halfSigmas(option.months);
-  const Z = draws.drivers.productivity;
-  return Z.map((z) => Math.exp((z < 0 ? low : high) * z));
+  const F = Float64Array.from(draws.drivers.productivity);
+  for (let k = 0; k < F.length; k++) F[k] = Math.exp((F[k]! < 0 ? low : high) * F[k]!);
+  return F;
 }
 
 /** Quantities of the foundations of a support by part and item, one for each class its ground may turn out to be. */

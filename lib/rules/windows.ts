@@ -32,6 +32,18 @@ export function windowOf(
   effects: readonly Effect[],
   given: Facts = {},
 ): Interval | null {
+  const key = JSON.stringify([form, fact, effects, given]);
+  const known = windows.get(key);
+  if (known !== undefined) return known;
+  const found = leftOpen(form, fact, effects, given);
+  windows.set(key, found);
+  return found;
+}
+
+/** Windows read so far: the book never changes, and a search asks for the same few again and again. */
+const windows = new Map<string, Interval | null>();
+
+function leftOpen(form: FormId, fact: string, effects: readonly Effect[], given: Facts): Interval | null {
   const asked = rulesFor(form).filter(
     (rule) => effects.includes(rule.effect) && limitsOn(wholeCondition(rule), fact, given).length > 0,
   );
