@@ -24,6 +24,10 @@ function levelUnitAt(at: At): number {
   return over.length === 1 && level.length === 1 ? level[0]! : -1;
 }
 
+/** Whether the depth along the deck bends at a chainage, or a support stands there. */
+const bendsAt = (at: At): boolean =>
+  depthAlong(at.appraisal.site, at.option.units, at.option.designs).xM.includes(place(at));
+
 const overPlace = (what: string): string => `options/:option/over/:x/${what}`;
 
 /** What stands over a chainage, the headroom that is left there, and the area of the deck. */
@@ -40,6 +44,7 @@ export const headroomFigures: readonly Descriptor[] = [
   }),
   described({
     path: overPlace('chainageM'),
+    when: bendsAt,
     label: 'chainage',
     unit: 'm',
     method: 'bend of the soffit',

@@ -1,5 +1,6 @@
 import { factFigures } from '../appraise/factFigures.ts';
 import { headroomFigures } from '../appraise/headroomFigures.ts';
+import { placeFigures } from '../appraise/placeFigures.ts';
 import { roadFigures } from '../appraise/roadFigures.ts';
 import { rulingFigures } from '../appraise/rulingFigures.ts';
 import { arrangementFigures } from '../arrange/figures.ts';
@@ -43,6 +44,7 @@ export const manual: readonly Descriptor[] = [
   ...designFigures,
   ...roadFigures,
   ...headroomFigures,
+  ...placeFigures,
   ...supportFigures,
   ...articulationFigures,
   ...shaftFigures,

@@ -1,4 +1,5 @@
 import { fixed } from '../format.ts';
+import type { Asked } from '../drawing/asked.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
@@ -13,10 +14,19 @@ import type { Table } from './table.ts';
 export interface CheckBarsInput {
   readonly form: FormId;
   readonly checks: readonly Check[];
+  /** Path of the design they belong to, e.g. 'options/1/designs/0'. */
+  readonly design?: string;
   readonly widthPx: number;
   readonly paper?: Paper;
   readonly prefix?: string;
 }
+
+/** A figure of one check. */
+const ofCheck = (
+  { design }: CheckBarsInput,
+  check: Check,
+  field: 'demand' | 'capacity' | 'utilisation',
+): Asked => (design === undefined ? undefined : `${design}/checks/${check.id}/${field}`);
 
 const sentence = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
 
@@ -64,6 +74,7 @@ export function checkBars(input: CheckBarsInput): Piece {
             anchor: 'end',
             weight,
             fill: over ? ink.accent : colours.ink,
+            figure: ofCheck(input, check, 'utilisation'),
           }),
           el('path', {
             d: `M0,${num(lineY)}H${num(widthPx - figureRoom)}`,
@@ -93,9 +104,9 @@ export const checkTable = (input: CheckBarsInput): Table => ({
   head: ['check', 'demand', 'capacity', 'unit', 'utilisation'],
   rows: input.checks.map((check) => [
     check.label,
-    fixed(check.demand, 1),
-    fixed(check.capacity, 1),
+    { text: fixed(check.demand, 1), figure: ofCheck(input, check, 'demand') },
+    { text: fixed(check.capacity, 1), figure: ofCheck(input, check, 'capacity') },
     check.unit,
-    fixed(check.utilisation, 2),
+    { text: fixed(check.utilisation, 2), figure: ofCheck(input, check, 'utilisation') },
   ]),
 });

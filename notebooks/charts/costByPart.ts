@@ -1,4 +1,5 @@
 import { fixed, money2, moneyUnit, signed } from '../format.ts';
+import { ofOption } from '../drawing/asked.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
 import { textWidth } from '../drawing/lettering.ts';
@@ -12,7 +13,7 @@ import { billParts } from '../model.ts';
 import { centreLine, levelLine } from './marks.ts';
 import type { OptionsInput } from './rowHead.ts';
 import { rowHead } from './rowHead.ts';
-import type { Table } from './table.ts';
+import type { Table, TableCell } from './table.ts';
 
 export interface CostByPartInput extends OptionsInput {
   readonly currency: string;
@@ -35,6 +36,8 @@ export const partNames: Readonly<Record<BillPart, string>> = {
 
 const partOf = (option: AppraisedOption, part: BillPart): number =>
   option.parts.filter((one) => one.part === part).reduce((sum, one) => sum + one.p50, 0);
+
+const partPath = (option: AppraisedOption, part: BillPart): string => ofOption(option, `parts/${part}/p50`);
 
 /** Parts that cost anything in any option, in the order of the bill. */
 const partsUsed = (options: readonly AppraisedOption[]): BillPart[] =>
@@ -166,6 +169,7 @@ export function costByPart(input: CostByPartInput): Piece {
             label(end + 4, y + 4, partFigure(value), {
               weight: differs ? 600 : 400,
               fill: differs ? colours.ink : colours.second,
+              figure: partPath(option, part),
             }),
           );
         }),
@@ -173,6 +177,7 @@ export function costByPart(input: CostByPartInput): Piece {
           anchor: 'end',
           size: letters.prose,
           weight: option === base ? 600 : 400,
+          figure: ofOption(option, 'cost/p50'),
         }),
         base !== undefined &&
           (option === base
@@ -180,6 +185,7 @@ export function costByPart(input: CostByPartInput): Piece {
             : label(widthPx, y + 4.5, signed((option.cost.p50 - base.cost.p50) / unit.per, 1), {
                 anchor: 'end',
                 size: letters.table,
+                figure: [ofOption(option, 'cost/p50'), ofOption(base, 'cost/p50')],
               })),
       );
     }),
@@ -230,8 +236,12 @@ export function partTable(input: CostByPartInput): Table {
     rows: input.options.map((option) => [
       String(option.number),
       formLooks[option.form].name,
-      ...parts.map((part) => fixed(partOf(option, part) / unit.per, 2)),
-      money2(option.cost.p50 / unit.per),
+      ...parts.map((part): TableCell => {
+        const value = partOf(option, part);
+        const text = fixed(value / unit.per, 2);
+        return value > 0 ? { text, figure: partPath(option, part) } : text;
+      }),
+      { text: money2(option.cost.p50 / unit.per), figure: ofOption(option, 'cost/p50') },
     ]),
   };
 }

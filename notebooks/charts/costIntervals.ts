@@ -1,4 +1,5 @@
 import { currencySign, listed, money2, moneyUnit, odds, plain, significant } from '../format.ts';
+import { ofOption, perM2Of, withinOf } from '../drawing/asked.ts';
 import { linearAxis, spreadValues } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { interval } from '../drawing/interval.ts';
@@ -162,19 +163,26 @@ export function costIntervals(input: CostIntervalsInput): Piece {
           anchor: 'end',
           fill: colours.second,
           halo: true,
+          figure: ofOption(option, 'cost/p10'),
         }),
-        label(axis.x(p90) + 5, y + 4, money2(p90 / unit.per), { fill: colours.second, halo: true }),
+        label(axis.x(p90) + 5, y + 4, money2(p90 / unit.per), {
+          fill: colours.second,
+          halo: true,
+          figure: ofOption(option, 'cost/p90'),
+        }),
         interval(option, axis.x, y, ink, 9),
         label(axis.x(p50), y - 10, money2(p50 / unit.per), {
           ...figure,
           anchor: 'middle',
           weight: 600,
           halo: true,
+          figure: ofOption(option, 'cost/p50'),
         }),
         !narrow &&
           label(priceX, y + 4.5, significant(option.pricePerM2.withApproaches, 2), {
             ...figure,
             anchor: 'end',
+            figure: perM2Of(option),
           }),
         !narrow &&
           within !== undefined &&
@@ -182,6 +190,7 @@ export function costIntervals(input: CostIntervalsInput): Piece {
             ...figure,
             anchor: 'end',
             weight: leads ? 600 : 400,
+            figure: withinOf(option),
           }),
       );
     }),
@@ -211,11 +220,12 @@ export function costTable(input: CostIntervalsInput): Table {
       return [
         String(option.number),
         formLooks[option.form].name,
-        money2(option.cost.p10 / unit.per),
-        money2(option.cost.p50 / unit.per),
-        money2(option.cost.p90 / unit.per),
-        significant(option.pricePerM2.withApproaches, 2),
-        within === undefined ? '' : odds(within),
+        ...(['p10', 'p50', 'p90'] as const).map((point) => ({
+          text: money2(option.cost[point] / unit.per),
+          figure: ofOption(option, `cost/${point}`),
+        })),
+        { text: significant(option.pricePerM2.withApproaches, 2), figure: perM2Of(option) },
+        within === undefined ? '' : { text: odds(within), figure: withinOf(option) },
         listed(others),
       ];
     }),

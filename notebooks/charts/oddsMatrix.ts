@@ -8,7 +8,7 @@ import { formInk } from '../forms/formInk.ts';
 import { optionNumber } from '../forms/optionNumber.ts';
 import type { AppraisedOption, Standing } from '../model.ts';
 import type { OptionsInput } from './rowHead.ts';
-import type { Table } from './table.ts';
+import type { Table, TableCell } from './table.ts';
 
 export interface OddsMatrixInput extends OptionsInput {
   readonly standing: Standing;
@@ -25,6 +25,9 @@ function footHatch(x: number, y: number, side: number): string {
   }
   return d;
 }
+
+const oddsOf = (row: AppraisedOption, column: AppraisedOption): string =>
+  `standing/odds/${String(row.number)}/${String(column.number)}`;
 
 function square(
   input: OddsMatrixInput,
@@ -56,6 +59,7 @@ function square(
       weight: settledCheaper ? 600 : 400,
       fill: settledCheaper || open ? colours.ink : colours.third,
       halo: open,
+      figure: Number.isFinite(share) ? oddsOf(row, column) : undefined,
     }),
   );
 }
@@ -122,8 +126,9 @@ export const oddsTable = (input: OddsMatrixInput): Table => ({
   head: ['option', ...input.options.map((option) => String(option.number))],
   rows: input.options.map((row) => [
     String(row.number),
-    ...input.options.map((column) =>
-      row === column ? '' : odds(input.standing.odds[row.number]?.[column.number] ?? NaN),
-    ),
+    ...input.options.map((column): TableCell => {
+      const share = input.standing.odds[row.number]?.[column.number];
+      return share === undefined ? '' : { text: odds(share), figure: oddsOf(row, column) };
+    }),
   ]),
 });

@@ -1,4 +1,5 @@
 import { fixed, significant } from '../format.ts';
+import { ofOption } from '../drawing/asked.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
 import { textWidth } from '../drawing/lettering.ts';
@@ -11,7 +12,7 @@ import type { AppraisedOption, Quantities } from '../model.ts';
 import { hatchedBand, levelLine } from './marks.ts';
 import type { OptionsInput } from './rowHead.ts';
 import { rowHead } from './rowHead.ts';
-import type { Table } from './table.ts';
+import type { Table, TableCell } from './table.ts';
 
 /** Columns of the chart, per m2 of deck. */
 const quantityColumns = ['concrete', 'steel', 'bars', 'strand'] as const;
@@ -20,21 +21,25 @@ export type QuantityColumn = (typeof quantityColumns)[number];
 interface ColumnLook {
   readonly name: string;
   readonly unit: string;
-  readonly value: (perM2: Quantities) => number;
   readonly places: number;
+  /** What it is made of; more than one add up. */
+  readonly fields: readonly (keyof Quantities)[];
 }
 
 const looks: Readonly<Record<QuantityColumn, ColumnLook>> = {
-  concrete: { name: 'Concrete', unit: 'm³/m²', value: (q) => q.concreteM3, places: 2 },
-  steel: { name: 'Structural steel', unit: 'kg/m²', value: (q) => q.structuralSteelKg, places: 0 },
-  bars: { name: 'Reinforcement', unit: 'kg/m²', value: (q) => q.reinforcementKg, places: 0 },
+  concrete: { name: 'Concrete', unit: 'm³/m²', fields: ['concreteM3'], places: 2 },
+  steel: { name: 'Structural steel', unit: 'kg/m²', fields: ['structuralSteelKg'], places: 0 },
+  bars: { name: 'Reinforcement', unit: 'kg/m²', fields: ['reinforcementKg'], places: 0 },
   strand: {
     name: 'Prestress and stays',
     unit: 'kg/m²',
-    value: (q) => q.prestressKg + q.stayCableKg + q.mainCableKg,
+    fields: ['prestressKg', 'stayCableKg', 'mainCableKg'],
     places: 0,
   },
 };
+
+const valueOf = ({ fields }: ColumnLook, q: Quantities): number =>
+  fields.reduce((sum, field) => sum + q[field], 0);
 
 /** What has been published for a form at that span. */
 export interface PublishedBand {
@@ -62,7 +67,7 @@ export function quantityMarks(input: QuantityMarksInput): Piece {
   );
   const narrow = widthPx < 680;
   const columns = quantityColumns.filter((column) =>
-    options.some((option) => looks[column].value(quantitiesOf(input, option)) > 0),
+    options.some((option) => valueOf(looks[column], quantitiesOf(input, option)) > 0),
   );
   const pitch = 27;
   const rowsHigh = options.length * pitch;
@@ -81,7 +86,7 @@ export function quantityMarks(input: QuantityMarksInput): Piece {
       const head = y0 + 34;
       const bands = options.map((option) => input.published?.[option.number]?.[column]);
       const largest = Math.max(
-        ...options.map((option) => look.value(quantitiesOf(input, option))),
+        ...options.map((option) => valueOf(look, quantitiesOf(input, option))),
         ...bands.map((band) => band?.high ?? 0),
       );
       const room = columnWidth - textWidth('888 above', letters.table, 600) - 20;
@@ -99,9 +104,10 @@ export function quantityMarks(input: QuantityMarksInput): Piece {
         }),
         options.map((option, row) => {
           const y = head + pitch * (row + 0.5);
-          const value = look.value(quantitiesOf(input, option));
+          const value = valueOf(look, quantitiesOf(input, option));
           const band = bands[row];
           const first = index % perLine === 0;
+          const asked = look.fields.filter((field) => quantitiesOf(input, option)[field] > 0);
           const outside =
             band === undefined || !(value > 0)
               ? ''
@@ -129,7 +135,11 @@ export function quantityMarks(input: QuantityMarksInput): Piece {
                     'stroke-width': 1.35,
                     'paint-order': 'stroke',
                   }),
-                  label(figureX, y + 4.5, text, { size: letters.table, weight: outside === '' ? 400 : 600 }),
+                  label(figureX, y + 4.5, text, {
+                    size: letters.table,
+                    weight: outside === '' ? 400 : 600,
+                    figure: asked.map((field) => ofOption(option, `perM2/${field}`)),
+                  }),
                   outside !== '' &&
                     label(figureX + textWidth(text, letters.table, 600) + 4, y + 4, outside, {
                       fill: ink.accent,
@@ -158,15 +168,19 @@ export const quantityTable = (input: QuantityMarksInput): Table => ({
   ],
   rows: input.options.map((option) => {
     const q = quantitiesOf(input, option);
+    const cell = (field: keyof Quantities, text = significant(q[field], 3)): TableCell => ({
+      text,
+      figure: ofOption(option, `perM2/${field}`),
+    });
     return [
       String(option.number),
       formLooks[option.form].name,
-      fixed(q.concreteM3, 2),
-      significant(q.reinforcementKg, 3),
-      significant(q.prestressKg, 3),
-      significant(q.structuralSteelKg, 3),
-      significant(q.stayCableKg, 3),
-      significant(q.mainCableKg, 3),
+      cell('concreteM3', fixed(q.concreteM3, 2)),
+      cell('reinforcementKg'),
+      cell('prestressKg'),
+      cell('structuralSteelKg'),
+      cell('stayCableKg'),
+      cell('mainCableKg'),
     ];
   }),
 });

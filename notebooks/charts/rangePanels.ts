@@ -9,7 +9,7 @@ import { formInk } from '../forms/formInk.ts';
 import { centreLine, gridUprights, levelLine } from './marks.ts';
 import type { OptionsInput } from './rowHead.ts';
 import { rowHead } from './rowHead.ts';
-import type { Table } from './table.ts';
+import type { Table, TableCell } from './table.ts';
 import type { Measure } from './tradeOffs.ts';
 
 export interface RangePanelsInput extends OptionsInput {
@@ -87,6 +87,7 @@ export function rangePanels(input: RangePanelsInput): Piece {
                     label(axis.x(spread.p90) + 7, y + 4.5, fixed(spread.p50, measure.places), {
                       size: letters.table,
                       halo: true,
+                      figure: measure.figures?.(option),
                     }),
                   ),
             );
@@ -103,11 +104,13 @@ export const rangeTable = (input: RangePanelsInput): Table => ({
   head: ['option', ...input.measures.map((measure) => measure.name)],
   rows: input.options.map((option) => [
     String(option.number),
-    ...input.measures.map((measure) => {
+    ...input.measures.map((measure): TableCell => {
       const spread = measure.values[option.number];
-      return spread === undefined
-        ? 'not worked out'
-        : `${fixed(spread.p50, measure.places)} (${fixed(spread.p10, measure.places)} to ${fixed(spread.p90, measure.places)})`;
+      if (spread === undefined) return 'not worked out';
+      const [p10, p50, p90] = [spread.p10, spread.p50, spread.p90].map((value) =>
+        fixed(value, measure.places),
+      );
+      return { text: `${p50} (${p10} to ${p90})`, figure: measure.figures?.(option) };
     }),
   ]),
 });

@@ -1,5 +1,7 @@
 import { currencySign, listed, money2, moneyUnit, odds, signed, significant, spansText } from '../format.ts';
-import { spansOf } from '../drawing/alongOption.ts';
+import { spanPaths, spansOf } from '../drawing/alongOption.ts';
+import type { Asked } from '../drawing/asked.ts';
+import { dataFigure, ofOption, perM2Of, rangeOf, withinOf } from '../drawing/asked.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
 import type { Piece } from '../drawing/piece.ts';
@@ -64,8 +66,8 @@ export function ranking(input: RankingInput): Piece {
   const unit = moneyUnit(currency, Math.max(0, ...options.map((option) => option.cost.p90)));
   const base = options.find((option) => option.number === reference);
   const money = (value: number): string => money2(value / unit.per);
-  const figure = (text: string, className = ''): Piece =>
-    el('td', { class: `figure ${className}`.trim() }, text);
+  const figure = (text: string, asked: Asked, className = ''): Piece =>
+    el('td', { class: `figure ${className}`.trim(), 'data-figure': dataFigure(asked) }, text);
   const head = [
     ['number', 'mark'],
     ['option', ''],
@@ -108,22 +110,38 @@ export function ranking(input: RankingInput): Piece {
           { class: classes, 'data-option': option.number },
           el('td', { class: 'mark' }, optionMark(option, reference, input.paper)),
           el('th', { scope: 'row', class: 'name' }, optionTitle(option).split(', ').slice(0, 2).join(', ')),
-          el('td', { class: 'fig' }, spansText(spansOf(option))),
-          figure(money(option.cost.p50), standing.leader === option.number ? 'decides' : ''),
-          figure(`${money(option.cost.p10)} to ${money(option.cost.p90)}`),
+          el(
+            'td',
+            {
+              class: 'fig',
+              'data-figure': dataFigure(spanPaths(option).filter((path) => path !== undefined)),
+            },
+            spansText(spansOf(option)),
+          ),
+          figure(
+            money(option.cost.p50),
+            ofOption(option, 'cost/p50'),
+            standing.leader === option.number ? 'decides' : '',
+          ),
+          figure(`${money(option.cost.p10)} to ${money(option.cost.p90)}`, rangeOf(option, 'cost')),
           base !== undefined &&
             (isBase
               ? el('td', { class: 'figure reference-word' }, 'reference')
-              : figure(signed((option.cost.p50 - base.cost.p50) / unit.per, 1))),
-          figure(significant(option.pricePerM2.withApproaches, 2)),
+              : figure(signed((option.cost.p50 - base.cost.p50) / unit.per, 1), [
+                  ofOption(option, 'cost/p50'),
+                  ofOption(base, 'cost/p50'),
+                ])),
+          figure(significant(option.pricePerM2.withApproaches, 2), perM2Of(option)),
           budget !== null &&
             figure(
               within === undefined ? '' : `${odds(within)} %`,
+              within === undefined ? undefined : withinOf(option),
               within !== undefined && within < 0.2 ? 'fails' : '',
             ),
-          figure(significant(option.months.p50, 2)),
+          figure(significant(option.months.p50, 2), ofOption(option, 'months/p50')),
           figure(
             option.limitingCheck.utilisation.toFixed(2),
+            ofOption(option, 'limitingCheck/utilisation'),
             option.limitingCheck.utilisation > 1.0005 ? 'fails' : '',
           ),
           el('td', { class: reason.fails ? 'why fails' : 'why' }, reason.words),

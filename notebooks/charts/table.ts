@@ -1,11 +1,16 @@
+import type { Asked } from '../drawing/asked.ts';
+import { dataFigure } from '../drawing/asked.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el } from '../drawing/piece.ts';
+
+/** Text of a cell, or text with the figure of the study it prints. */
+export type TableCell = string | { readonly text: string; readonly figure: Asked };
 
 /** The table behind a chart: every figure it shows, as text. */
 export interface Table {
   readonly caption: string;
   readonly head: readonly string[];
-  readonly rows: readonly (readonly string[])[];
+  readonly rows: readonly (readonly TableCell[])[];
 }
 
 /** A table as HTML; the first column heads its row, the others are figures. */
@@ -30,7 +35,12 @@ export function tablePiece(table: Table): Piece {
         el(
           'tr',
           {},
-          row.map((text, index) => (index === 0 ? el('th', { scope: 'row' }, text) : el('td', {}, text))),
+          row.map((cell, index) => {
+            const { text, figure } = typeof cell === 'string' ? { text: cell, figure: undefined } : cell;
+            return index === 0
+              ? el('th', { scope: 'row' }, text)
+              : el('td', { 'data-figure': dataFigure(figure) }, text);
+          }),
         ),
       ),
     ),

@@ -1,4 +1,6 @@
 import { fixed, odds } from '../format.ts';
+import type { Asked } from '../drawing/asked.ts';
+import { dataFigure, ofOption } from '../drawing/asked.ts';
 import { linearAxis } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
@@ -19,6 +21,8 @@ export interface Measure {
   /** By option number; an option without a figure is left out of the panel. */
   readonly values: Readonly<Record<number, Spread>>;
   readonly places: number;
+  /** Which figures of the study an option's value is or was made from. */
+  readonly figures?: (option: AppraisedOption) => Asked;
   /** Share of draws in which each option is on the edge, where it was counted. */
   readonly onEdge?: Readonly<Record<number, number>>;
 }
@@ -39,13 +43,17 @@ function mark(
   filled: boolean,
   reference: boolean,
   ink: FormInk,
+  figure: Asked,
 ): Piece {
   const colour = reference ? ink.accent : ink.line(place.option.form);
-  const number = optionNumber(place.option.number, at.x, at.y, {
-    colour,
-    filled: filled || reference,
-    faded: !filled && !reference,
-  });
+  const number = g(
+    { 'data-figure': dataFigure(figure) },
+    optionNumber(place.option.number, at.x, at.y, {
+      colour,
+      filled: filled || reference,
+      faded: !filled && !reference,
+    }),
+  );
   if (!at.flag) return number;
   const edge = at.x > place.x ? at.x - 9.5 : at.x + 9.5;
   return g(
@@ -167,7 +175,14 @@ export function panel(
       const at = offs.get(place.option.number);
       return at === undefined
         ? null
-        : mark(place, at, best.has(place.option.number), place.option.number === input.reference, ink);
+        : mark(
+            place,
+            at,
+            best.has(place.option.number),
+            place.option.number === input.reference,
+            ink,
+            [measure.figures?.(place.option) ?? [], ofOption(place.option, 'cost/p50')].flat(),
+          );
     }),
     measure.onEdge !== undefined &&
       edgeShares(input, measure.onEdge, best, ink, left, bottom + 38, right - left),

@@ -1,5 +1,6 @@
 import { scaleLog } from 'd3-scale';
 import { fixed, money2, moneyUnit, plain } from '../format.ts';
+import { ofOption } from '../drawing/asked.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
 import type { Piece } from '../drawing/piece.ts';
@@ -7,7 +8,7 @@ import { el, g, num } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
 import { formInk } from '../forms/formInk.ts';
 import { logTicks } from './logTicks.ts';
-import type { Table } from './table.ts';
+import type { Table, TableCell } from './table.ts';
 import type { TradeOffsInput } from './tradeOffPanel.ts';
 import { panel, panelHeight } from './tradeOffPanel.ts';
 
@@ -98,8 +99,12 @@ export function tradeOffTable(input: TradeOffsInput): Table {
     head: ['option', 'cost', ...input.measures.map((measure) => measure.name)],
     rows: input.options.map((option) => [
       String(option.number),
-      money2(option.cost.p50 / unit.per),
-      ...input.measures.map((measure) => fixed(measure.values[option.number]?.p50 ?? NaN, measure.places)),
+      { text: money2(option.cost.p50 / unit.per), figure: ofOption(option, 'cost/p50') },
+      ...input.measures.map((measure): TableCell => {
+        const spread = measure.values[option.number];
+        const text = fixed(spread?.p50 ?? NaN, measure.places);
+        return spread === undefined ? text : { text, figure: measure.figures?.(option) };
+      }),
     ]),
   };
 }

@@ -1,5 +1,6 @@
 import type { AppraisedOption, Design, Site, Unit, WorkedOption } from '../model.ts';
 import { constructionDepth } from '../model.ts';
+import { ofOption } from './asked.ts';
 
 /** Straight-line reading of a table at x; the end values hold outside it. Empty tables give NaN. */
 export function readAt(xs: readonly number[], ys: readonly number[], x: number): number {
@@ -80,6 +81,15 @@ export function leastSoffit(site: Site, chainageM: number): number {
   return least;
 }
 
+/** Path of the limit behind `leastSoffit`; undefined where nothing limits it. */
+export function leastLimit(site: Site, chainageM: number): string | undefined {
+  const least = leastSoffit(site, chainageM);
+  const index = site.soffitLimits.findIndex(
+    ({ fromM, toM, levelM }) => levelM === least && chainageM >= fromM && chainageM <= toM,
+  );
+  return index < 0 ? undefined : `site/soffitLimits/${String(index)}/levelM`;
+}
+
 /** Chainages of all supports in order, each once, m. */
 export function supportChainages(option: WorkedOption): number[] {
   const all = option.units.flatMap((unit) => unit.supportsM).sort((a, b) => a - b);
@@ -90,6 +100,20 @@ export function supportChainages(option: WorkedOption): number[] {
 export function spansOf(option: WorkedOption): number[] {
   const at = supportChainages(option);
   return at.slice(1).map((chainageM, index) => chainageM - (at[index] ?? 0));
+}
+
+/** Paths of the spans of `spansOf`, undefined where two units share one. */
+export function spanPaths(option: AppraisedOption): (string | undefined)[] {
+  const at = supportChainages(option);
+  return at.slice(1).map((toM, index) => {
+    const fromM = at[index] ?? NaN;
+    const near = (a: number | undefined, b: number): boolean => Math.abs((a ?? NaN) - b) <= 0.05;
+    for (const [u, { supportsM }] of option.units.entries()) {
+      const span = supportsM.findIndex((x, s) => near(x, fromM) && near(supportsM[s + 1], toM));
+      if (span >= 0) return ofOption(option, `designs/${String(u)}/task/spansM/${String(span)}`);
+    }
+    return undefined;
+  });
 }
 
 /** Names on the bearing bubbles: A, P1, P2 ... B. */

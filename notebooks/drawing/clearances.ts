@@ -1,5 +1,7 @@
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
-import { groundLevel, lowestSoffit } from './alongOption.ts';
+import { groundLevel, leastSoffit, lowestSoffit } from './alongOption.ts';
+import type { Asked } from './asked.ts';
+import { overOf } from './asked.ts';
 import { dimensionChain, uprightDimension } from './dimension.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
@@ -19,6 +21,8 @@ export interface Envelope {
   readonly railway: boolean;
   readonly water: boolean;
   readonly confirmed: boolean;
+  /** Path of the clearance it was read from, where it was read from the brief. */
+  readonly path?: string;
 }
 
 /**
@@ -27,7 +31,7 @@ export interface Envelope {
  */
 export function envelopes(site: Site, obstacles?: readonly Obstacle[]): Envelope[] {
   if (obstacles !== undefined) {
-    return obstacles.flatMap(({ kind, clearance }) =>
+    return obstacles.flatMap(({ kind, clearance }, index) =>
       clearance === null
         ? []
         : [
@@ -39,6 +43,7 @@ export function envelopes(site: Site, obstacles?: readonly Obstacle[]): Envelope
               railway: kind === 'railway',
               water: kind === 'river',
               confirmed: clearance.confirmed,
+              path: `brief/obstacles/${String(index)}/clearance`,
             },
           ],
     );
@@ -62,17 +67,36 @@ export function envelopes(site: Site, obstacles?: readonly Obstacle[]): Envelope
     });
 }
 
-/** What is left between an envelope and the soffit, in words, where it is less than a metre; empty otherwise. */
-export function spareWords(site: Site, option: AppraisedOption | null, one: Envelope): string {
-  if (option === null) return '';
+/** What is left between an envelope and the soffit, in words, and which figure that is. */
+interface Spare {
+  readonly words: string;
+  readonly figure: Asked;
+}
+
+/** What is left between an envelope and the soffit where it is less than a metre; no words otherwise. */
+function spareOver(site: Site, option: AppraisedOption | null, one: Envelope): Spare {
+  const none = { words: '', figure: undefined };
+  if (option === null) return none;
   const places = [0, 0.25, 0.5, 0.75, 1].map((part) => one.fromM + part * (one.toM - one.fromM));
-  const least = Math.min(...places.map((at) => lowestSoffit(site, option, at) - one.topLevelM));
-  if (!Number.isFinite(least) || least >= 1) return '';
-  return least < -0.005 ? `${level(-least)} too low` : `${level(least)} spare`;
+  const spares = places.map((at) => lowestSoffit(site, option, at) - one.topLevelM);
+  const least = Math.min(...spares);
+  if (!Number.isFinite(least) || least >= 1) return none;
+  const at = places[spares.indexOf(least)] ?? NaN;
+  return {
+    words: least < -0.005 ? `${level(-least)} too low` : `${level(least)} spare`,
+    // Where a flood asks for more than the envelope, what is spare there is another figure.
+    figure: Math.abs(leastSoffit(site, at) - one.topLevelM) < 1e-9 ? overOf(option, at, 'spareM') : undefined,
+  };
 }
 
 /** One envelope: its outline, and its headroom with what is spare, inside it or at the side where there is room. */
-function envelopePiece(frame: Frame, one: Envelope, spare: string, accent: string, room: Placer): Piece {
+function envelopePiece(
+  frame: Frame,
+  one: Envelope,
+  { words: spare, figure }: Spare,
+  accent: string,
+  room: Placer,
+): Piece {
   const left = frame.x(one.fromM);
   const right = frame.x(one.toM);
   const top = frame.y(one.topLevelM);
@@ -108,7 +132,14 @@ function envelopePiece(frame: Frame, one: Envelope, spare: string, accent: strin
     return g(
       {},
       outline,
-      label((left + right) / 2, (top + foot) / 2 + 4, inside, { anchor: 'middle', fill: accent }),
+      label((left + right) / 2, (top + foot) / 2 + 4, inside, {
+        anchor: 'middle',
+        fill: accent,
+        figure:
+          one.path === undefined
+            ? undefined
+            : ['fromM', 'toM', 'headroomM'].map((end) => `${one.path!}/${end}`),
+      }),
     );
   }
   const wide = Math.max(textWidth(headroom, letters.drawing), textWidth(spare, letters.drawing)) + 14;
@@ -122,12 +153,17 @@ function envelopePiece(frame: Frame, one: Envelope, spare: string, accent: strin
   return g(
     {},
     outline,
-    uprightDimension(x, top, foot, headroom, { colour: accent, side: atLeft ? 'left' : 'right' }),
+    uprightDimension(x, top, foot, headroom, {
+      colour: accent,
+      side: atLeft ? 'left' : 'right',
+      asked: one.path === undefined ? undefined : `${one.path}/headroomM`,
+    }),
     spare !== '' &&
       label(x + (atLeft ? -6 : 6), (top + foot) / 2 + 17, spare, {
         anchor: atLeft ? 'end' : 'start',
         fill: spare.endsWith('low') ? accent : colours.ink,
         halo: true,
+        figure,
       }),
   );
 }
@@ -143,7 +179,7 @@ export function clearances(
 ): Piece {
   return g(
     { class: 'clearances' },
-    list.map((one) => envelopePiece(frame, one, spareWords(site, option, one), accent, room)),
+    list.map((one) => envelopePiece(frame, one, spareOver(site, option, one), accent, room)),
   );
 }
 
@@ -164,6 +200,7 @@ export function barredDimension(site: Site, frame: Frame, y: number, accent: str
       'stroke-dasharray': '4.6 2.8',
     }),
     dimensionChain([left, right], y, [`${opening.widthM.toFixed(1)} no pier`], {
+      asked: ['site/mainOpening/widthM'],
       colour: accent,
       halo: true,
       inLine: true,

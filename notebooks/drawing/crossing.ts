@@ -1,7 +1,7 @@
 import { fixed, length } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
-import { roadLevel, soffitLevel, supportChainages } from './alongOption.ts';
+import { roadLevel, soffitLevel, spanPaths, supportChainages } from './alongOption.ts';
 import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Envelope } from './clearances.ts';
 import { barredDimension, barredWash, clearances, envelopes } from './clearances.ts';
@@ -188,9 +188,14 @@ export function crossing(input: CrossingInput): Piece {
         dimensionChain([frame.x(site.startM), frame.x(site.endM)], dimensionTop, [total], {
           weight: 600,
           size: letters.table,
+          asked: ['site/lengthM'],
         }),
       inside.length > 1 &&
-        dimensionChain(inside.map(frame.x), dimensionBottom, figures, { weight: 600, size: dimensionSize }),
+        dimensionChain(inside.map(frame.x), dimensionBottom, figures, {
+          weight: 600,
+          size: dimensionSize,
+          asked: inside.length === chainages.length && option !== null ? spanPaths(option) : ['site/lengthM'],
+        }),
       band?.piece,
       withBar &&
         scaleBar(scale, Math.max(frame.x(site.startM), 8), afterBand + 26, {

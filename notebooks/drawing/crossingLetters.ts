@@ -10,6 +10,8 @@ import {
   spansOf,
   supportChainages,
 } from './alongOption.ts';
+import type { Asked } from './asked.ts';
+import { ofOption, overOf } from './asked.ts';
 import { uprightDimension } from './dimension.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters } from './ink.ts';
@@ -32,8 +34,8 @@ export interface Room {
 /** Levels of water, flood and rail on shelves, each where there is most room along its own line. */
 export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefined, room: Room): Piece[] {
   const { frame } = room;
-  const marks: { at: readonly number[]; levelM: number; words: string; water: boolean }[] = [];
-  for (const water of site.waters) {
+  const marks: { at: readonly number[]; levelM: number; words: string; water: boolean; asked: Asked }[] = [];
+  for (const [index, water] of site.waters.entries()) {
     const at = [0.2, 0.14, 0.25, 0.82, 0.76, 0.5].map(
       (part) => water.fromM + part * (water.toM - water.fromM),
     );
@@ -42,17 +44,19 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
       levelM: water.levelM,
       words: level(water.levelM),
       water: true,
+      asked: `site/waters/${String(index)}/levelM`,
     });
   }
-  for (const { levelM, fromM, toM } of floodStretches(site, frame)) {
+  for (const { levelM, fromM, toM, water } of floodStretches(site, frame)) {
     marks.push({
       at: [0.8, 0.7, 0.9, 0.2, 0.3, 0.1, 0.5].map((part) => fromM + part * (toM - fromM)),
       levelM,
       words: `${level(levelM)} flood`,
       water: false,
+      asked: `site/waters/${String(water)}/floodLevelM`,
     });
   }
-  for (const { kind, clearance } of obstacles ?? []) {
+  for (const [index, { kind, clearance }] of (obstacles ?? []).entries()) {
     if (clearance === null || kind === 'river') continue;
     marks.push({
       at: [
@@ -66,9 +70,10 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
       levelM: clearance.datumLevelM,
       words: `${level(clearance.datumLevelM)} ${kind === 'railway' ? 'rail' : kind}`,
       water: false,
+      asked: `brief/obstacles/${String(index)}/clearance/datumLevelM`,
     });
   }
-  return marks.flatMap(({ at, levelM, words, water }) => {
+  return marks.flatMap(({ at, levelM, words, water, asked }) => {
     const candidates = at
       .filter((m) => m > frame.fromM && m < frame.toM)
       .flatMap((m) => (['right', 'left'] as const).map((side) => ({ x: frame.x(m), side })));
@@ -78,7 +83,7 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
       ];
     return chosen === undefined
       ? []
-      : [levelMark(chosen.x, frame.y(levelM), words, { side: chosen.side, water })];
+      : [levelMark(chosen.x, frame.y(levelM), words, { side: chosen.side, water, asked })];
   });
 }
 
@@ -103,7 +108,7 @@ export function depthMarks(site: Site, option: AppraisedOption, room: Room): Pie
     const top = frame.y(slabLevel(site, option, here));
     const bottom = frame.y(soffitLevel(site, option, here));
     room.placer.take({ left: x, right: x + 34, top, bottom }, 2);
-    return [uprightDimension(x, top, bottom, level(depth))];
+    return [uprightDimension(x, top, bottom, level(depth), { asked: overOf(option, at, 'structureM') })];
   });
 }
 
@@ -118,6 +123,7 @@ function freeLabel(
     readonly fill?: string;
     readonly letterSpacing?: number;
     readonly anchor?: 'start' | 'middle' | 'end';
+    readonly figure?: Asked;
   },
   limit = 160,
 ): Piece | null {
@@ -175,6 +181,20 @@ export function names(site: Site, room: Room): (Piece | null)[] {
   return [...river, ...ways];
 }
 
+/** The level a founding is written at: pile toes, or the two figures the underside of a footing is made of. */
+function toePath(option: AppraisedOption, index: number): Asked {
+  const support = option.supports[index];
+  const foundation = support === undefined ? null : likeliest(support);
+  if (support === undefined || foundation === null) return undefined;
+  const at = ofOption(
+    option,
+    `supports/${String(index)}/foundations/${String(support.foundations.indexOf(foundation))}`,
+  );
+  return foundation.piles === null
+    ? [`${at}/footing/topLevelM`, `${at}/footing/depthM`]
+    : `${at}/piles/toeLevelM`;
+}
+
 /** Founding levels with their spread beside the piles, and the bearing stratum named on its own line. */
 export function belowGround(
   site: Site,
@@ -183,7 +203,7 @@ export function belowGround(
   lowestM: number,
 ): (Piece | null)[] {
   const { frame } = room;
-  const toes = (option?.supports ?? []).map((support) => {
+  const toes = (option?.supports ?? []).map((support, index) => {
     const foundation = likeliest(support);
     if (foundation === null || support.chainageM < frame.fromM || support.chainageM > frame.toM) return null;
     const toe = toeLevel(foundation);
@@ -202,7 +222,7 @@ export function belowGround(
         [left, y - 12],
       ],
       words,
-      { fill: colours.second },
+      { fill: colours.second, figure: option === null ? undefined : toePath(option, index) },
     );
   });
   const said = new Set<string>();

@@ -1,6 +1,15 @@
 import type { AppraisedOption, Site } from '../model.ts';
 import { chainage, level, unknownMark } from '../format.ts';
-import { groundLevel, leastSoffit, roadLevel, lowestSoffit, supportChainages } from './alongOption.ts';
+import {
+  groundLevel,
+  leastLimit,
+  leastSoffit,
+  roadLevel,
+  lowestSoffit,
+  supportChainages,
+} from './alongOption.ts';
+import type { Asked } from './asked.ts';
+import { overOf } from './asked.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
@@ -64,6 +73,7 @@ interface Row {
   readonly value?: (chainageM: number) => number;
   readonly bold?: boolean;
   readonly fill?: (chainageM: number) => string;
+  readonly asked?: (chainageM: number) => Asked;
 }
 
 export interface BandStyle {
@@ -95,12 +105,25 @@ export function dataBand(
   const limited = places.some((at) => Number.isFinite(leastSoffit(site, at)));
   const rows: Row[] = [
     { name: 'ch', figure: chainage, bold: true },
-    { name: 'ground', figure: (at) => show(groundLevel(site, at)) },
+    {
+      name: 'ground',
+      figure: (at) => show(groundLevel(site, at)),
+      asked: (at) => `site/groundAt/${String(at)}`,
+    },
   ];
   if (option !== null) {
     rows.push(
-      { name: 'road', figure: (at) => show(roadLevel(site, option, at)) },
-      { name: 'soffit', figure: (at) => show(lowestSoffit(site, option, at)) },
+      {
+        name: 'road',
+        figure: (at) => show(roadLevel(site, option, at)),
+        asked: (at) => overOf(option, at, 'roadM'),
+      },
+      {
+        name: 'soffit',
+        figure: (at) => show(lowestSoffit(site, option, at)),
+        asked: (at) =>
+          Number.isFinite(lowestSoffit(site, option, at)) ? overOf(option, at, 'soffitM') : undefined,
+      },
     );
   }
   if (limited) {
@@ -108,6 +131,7 @@ export function dataBand(
       name: 'at least',
       figure: (at) => show(leastSoffit(site, at)),
       fill: (at) => (Number.isFinite(leastSoffit(site, at)) ? style.accent : colours.second),
+      asked: (at) => leastLimit(site, at),
     });
     if (option !== null)
       rows.push({
@@ -115,6 +139,7 @@ export function dataBand(
         figure: (at) => show(spare(at)),
         value: spare,
         fill: (at) => (spare(at) < -0.005 ? style.accent : colours.ink),
+        asked: (at) => (Number.isFinite(spare(at)) ? overOf(option, at, 'spareM') : undefined),
       });
   }
   const height = rows.length * bandRow;
@@ -141,6 +166,7 @@ export function dataBand(
             anchor: 'middle',
             weight: row.bold === true || isLeast ? 600 : 400,
             fill: row.fill?.(at) ?? colours.ink,
+            figure: row.asked?.(at),
           });
         }),
       );

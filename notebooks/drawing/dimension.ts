@@ -1,3 +1,4 @@
+import type { Asked } from './asked.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import type { Piece } from './piece.ts';
@@ -22,6 +23,7 @@ export function dimensionChain(
   style: DimensionStyle & {
     readonly boldest?: number;
     /** Figure in the line instead of above it. */ readonly inLine?: boolean;
+    /** Which figures of the study they are, in the same order. */ readonly asked?: readonly Asked[];
   } = {},
 ): Piece {
   const colour = style.colour ?? colours.ink;
@@ -50,6 +52,7 @@ export function dimensionChain(
         weight: style.boldest === index ? 600 : (style.weight ?? 400),
         fill: colour,
         halo: style.halo === true,
+        figure: style.asked?.[index],
       });
     }),
   );
@@ -61,7 +64,7 @@ export function uprightDimension(
   y0: number,
   y1: number,
   figure: string,
-  style: DimensionStyle & { readonly side?: 'left' | 'right' } = {},
+  style: DimensionStyle & { readonly side?: 'left' | 'right'; readonly asked?: Asked } = {},
 ): Piece {
   const colour = style.colour ?? colours.ink;
   const left = style.side === 'left';
@@ -80,6 +83,7 @@ export function uprightDimension(
       weight: style.weight ?? 400,
       fill: colour,
       halo: style.halo !== false,
+      figure: style.asked,
     }),
   );
 }

@@ -1,3 +1,5 @@
+import type { Asked } from './asked.ts';
+import { dataFigure } from './asked.ts';
 import { colours, letters } from './ink.ts';
 import type { Piece } from './piece.ts';
 import { el } from './piece.ts';
@@ -14,6 +16,8 @@ export interface LabelStyle {
   readonly class?: string;
   /** Turned about its foot, degrees clockwise. */
   readonly turn?: number;
+  /** The figure of the study it prints, to be asked where it comes from. */
+  readonly figure?: Asked;
 }
 
 /** A line of lettering whose baseline starts (or is centred, or ends) at x, y px. */
@@ -34,6 +38,7 @@ export function label(x: number, y: number, text: string, style: LabelStyle = {}
       'stroke-linejoin': style.halo === true ? 'round' : undefined,
       'paint-order': style.halo === true ? 'stroke' : undefined,
       class: style.class,
+      'data-figure': dataFigure(style.figure),
       transform:
         style.turn === undefined
           ? undefined

@@ -1,7 +1,9 @@
 import { chainage, level } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
-import { depthAt, leastSoffit, lowestSoffit, placedUnits, roadLevel } from './alongOption.ts';
+import { depthAt, leastLimit, leastSoffit, lowestSoffit, placedUnits, roadLevel } from './alongOption.ts';
+import type { Asked } from './asked.ts';
+import { overOf } from './asked.ts';
 import { uprightDimension } from './dimension.ts';
 import type { Paper } from './ink.ts';
 import { colours, pens } from './ink.ts';
@@ -39,18 +41,19 @@ interface Rung {
   readonly bottom: number;
   readonly words: string;
   readonly colour: string;
+  readonly figure?: Asked;
 }
 
 /** Dimensions one below the other; words of thin steps move down until they clear those above. */
 function rungPieces(rungs: readonly Rung[], x: number): Piece[] {
   let lastBase = -Infinity;
-  return rungs.map(({ top, bottom, words, colour }) => {
+  return rungs.map(({ top, bottom, words, colour, figure }) => {
     const base = Math.max((top + bottom) / 2 + 4, lastBase + 13);
     lastBase = base;
     return g(
       {},
       uprightDimension(x, top, bottom, '', { side: 'left', colour }),
-      label(x - 6, base, words, { anchor: 'end', fill: colour, halo: true }),
+      label(x - 6, base, words, { anchor: 'end', fill: colour, halo: true, figure }),
     );
   });
 }
@@ -146,10 +149,30 @@ export function ladder(input: LadderInput): Piece {
       'stroke-width': pens.thin,
     });
   const rungs: Rung[] = [
-    { top: v.yRoad, bottom: v.ySlab, words: `${level(v.surfacing)} surfacing`, colour: colours.ink },
-    { top: v.ySlab, bottom: v.yUnder, words: `${level(v.depth)} structure`, colour: colours.ink },
+    {
+      top: v.yRoad,
+      bottom: v.ySlab,
+      words: `${level(v.surfacing)} surfacing`,
+      colour: colours.ink,
+      figure: 'site/deck/surfacingM',
+    },
+    {
+      top: v.ySlab,
+      bottom: v.yUnder,
+      words: `${level(v.depth)} structure`,
+      colour: colours.ink,
+      figure: overOf(option, at, 'structureM'),
+    },
     ...(v.fall > 0.005
-      ? [{ top: v.yUnder, bottom: v.ySoffit, words: `${level(v.fall)} crossfall`, colour: colours.ink }]
+      ? [
+          {
+            top: v.yUnder,
+            bottom: v.ySoffit,
+            words: `${level(v.fall)} crossfall`,
+            colour: colours.ink,
+            figure: overOf(option, at, 'fallM'),
+          },
+        ]
       : []),
     ...(Number.isFinite(v.spare)
       ? [
@@ -158,6 +181,7 @@ export function ladder(input: LadderInput): Piece {
             bottom: Math.max(v.ySoffit, v.yLeast),
             words: spareWords,
             colour: tooLow ? ink.accent : colours.ink,
+            figure: overOf(option, at, 'spareM'),
           },
         ]
       : []),
@@ -208,12 +232,15 @@ export function ladder(input: LadderInput): Piece {
           fill: 'none',
         }),
       rungPieces(rungs, left - 18),
-      levelMark(markX, v.yRoad, `${level(v.road)} road`),
-      levelMark(markX, v.ySoffit, `${level(v.soffit)} lowest soffit`),
+      levelMark(markX, v.yRoad, `${level(v.road)} road`, { asked: overOf(option, at, 'roadM') }),
+      levelMark(markX, v.ySoffit, `${level(v.soffit)} lowest soffit`, {
+        asked: overOf(option, at, 'soffitM'),
+      }),
       Number.isFinite(v.least) &&
         label(markX + 12, Math.max(v.yLeast + 4, v.ySoffit + 12), `${level(v.least)} lowest allowed`, {
           fill: ink.accent,
           halo: true,
+          figure: leastLimit(site, at),
         }),
       Number.isFinite(datum) && levelMark(markX, v.yDatum, `${level(datum)} ${datumWords}`),
     ],

@@ -1,3 +1,4 @@
+import type { Asked } from './asked.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
@@ -11,6 +12,8 @@ export interface LevelMarkStyle {
   readonly side?: 'left' | 'right';
   /** Water: two short dashes under the triangle. */
   readonly water?: boolean;
+  /** The figure of the study it states. */
+  readonly asked?: Asked;
 }
 
 const half = 4.6;
@@ -51,6 +54,7 @@ export function levelMark(x: number, y: number, text: string, style: LevelMarkSt
       anchor: left ? 'end' : 'start',
       fill: colour,
       halo: true,
+      figure: style.asked,
     }),
   );
 }

@@ -1,7 +1,8 @@
 import { currencySign, length, money2, odds, plain, significant } from '../format.ts';
 import { glyph } from '../forms/glyph.ts';
 import type { AppraisedOption } from '../model.ts';
-import { spansOf, supportChainages } from './alongOption.ts';
+import { spanPaths, spansOf, supportChainages } from './alongOption.ts';
+import { ofOption, perM2Of, rangeOf, withinOf } from './asked.ts';
 import { barredWash } from './clearances.ts';
 import { elevationBody, levelRange } from './elevation.ts';
 import { frameOf } from './frame.ts';
@@ -27,6 +28,7 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
   const ground = frame.y(range.bottomM);
   const chainages = supportChainages(option);
   const spans = spansOf(option);
+  const asked = spanPaths(option);
   const spanY = ground + 12;
   const intervalY = spanY + 18;
   const figureY = intervalY + 22;
@@ -43,6 +45,7 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
       size: letters.section,
       weight: reference ? 600 : 400,
       anchor: 'end',
+      figure: ofOption(option, 'cost/p50'),
     }),
     barredWash(site, frame, titleY + 10, spanY + 4),
     elevationBody(site, option, frame, ink, range, { plain: true }),
@@ -59,6 +62,7 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
           ? label(frame.x((chainages[index] ?? 0) + span / 2), spanY, figure, {
               anchor: 'middle',
               weight: index === mainSpan(option) ? 600 : 400,
+              figure: asked[index],
             })
           : null;
       }),
@@ -70,15 +74,22 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
         stroke: ink.accent,
         'stroke-width': pens.heavy,
       }),
-    label(0, figureY, `${money2(p10 / unit.per)} to ${money2(p90 / unit.per)} ${unit.label}`, second),
+    label(0, figureY, `${money2(p10 / unit.per)} to ${money2(p90 / unit.per)} ${unit.label}`, {
+      ...second,
+      figure: rangeOf(option, 'cost'),
+    }),
     label(
       widthPx * 0.36,
       figureY,
       `${significant(option.pricePerM2.withApproaches, 2)} ${currencySign(input.currency)}/m²`,
-      second,
+      { ...second, figure: perM2Of(option) },
     ),
     within !== undefined &&
-      label(widthPx, figureY, `${odds(within)} % within budget`, { ...second, anchor: 'end' }),
+      label(widthPx, figureY, `${odds(within)} % within budget`, {
+        ...second,
+        anchor: 'end',
+        figure: withinOf(option),
+      }),
   ]);
   return { piece, bottom, frame };
 }

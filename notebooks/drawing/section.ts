@@ -2,6 +2,7 @@ import { level } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import { formLooks } from '../forms/formLook.ts';
 import type { Design, SectionCut } from '../model.ts';
+import type { Asked } from './asked.ts';
 import { dimensionChain, uprightDimension } from './dimension.ts';
 import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
@@ -26,6 +27,8 @@ export interface Callout {
 
 export interface SectionInput {
   readonly design: Design;
+  /** Its path, e.g. 'options/1/designs/0'. */
+  readonly path?: string;
   readonly widthPx: number;
   readonly scale?: Scale;
   /** One cut or view by its name, e.g. 'pylon'; otherwise the deck, in halves where it is deeper at its piers. */
@@ -41,19 +44,33 @@ interface Height {
   readonly fromM: number;
   readonly toM: number;
   readonly words: string;
+  readonly asked: Asked;
+}
+
+/** The depth of a design that is drawn, where it is one of the two it was sized with. */
+function depthPath({ design, path }: SectionInput, depthM: number): Asked {
+  const where = (['midspan', 'support'] as const).find(
+    (one) => Math.abs(design.depthM[one] - depthM) < 0.005,
+  );
+  return path === undefined || where === undefined ? undefined : `${path}/depthM/${where}`;
 }
 
 /** Structural depth at each cut, and the whole height where members stand above the road. */
-function heights(left: SectionCut, right: SectionCut | null): Height[] {
+function heights(input: SectionInput, left: SectionCut, right: SectionCut | null): Height[] {
   const depth = (cut: SectionCut, at: string): Height => {
     const low = lowestOf(cut.shapes);
-    return { fromM: 0, toM: low, words: `${level(-low)}${at}` };
+    return { fromM: 0, toM: low, words: `${level(-low)}${at}`, asked: depthPath(input, -low) };
   };
   const out =
     right === null ? [depth(left, '')] : [depth(right, ` at ${right.at}`), depth(left, ` at ${left.at}`)];
   const whole = extentOf(structureOf(left.shapes));
   if (whole.top > 1.6)
-    out.push({ fromM: whole.top, toM: whole.bottom, words: `${level(whole.top - whole.bottom)} high` });
+    out.push({
+      fromM: whole.top,
+      toM: whole.bottom,
+      words: `${level(whole.top - whole.bottom)} high`,
+      asked: undefined,
+    });
   return out;
 }
 
@@ -70,7 +87,7 @@ export function section(input: SectionInput): Piece {
     ]);
   const extent = extentOf([...cuts.left.shapes, ...(cuts.right?.shapes ?? [])]);
   const { widthM } = design.task.deck;
-  const dimensions = heights(cuts.left, cuts.right);
+  const dimensions = heights(input, cuts.left, cuts.right);
   // Each upright stands clear of the words of the one before.
   const steps = dimensions.map(({ words }) => textWidth(words, letters.drawing) + 18);
   const rightRoom = 22 + steps.reduce((sum, one) => sum + one, 0);
@@ -123,9 +140,10 @@ export function section(input: SectionInput): Piece {
     dimensionChain([place.x(-widthM / 2), place.x(widthM / 2)], 16, [level(widthM)], {
       weight: 600,
       size: letters.table,
+      asked: [input.path === undefined ? undefined : `${input.path}/task/deck/widthM`],
     }),
-    dimensions.map(({ fromM, toM, words }, index) =>
-      uprightDimension(uprightX[index] ?? 0, place.y(fromM), place.y(toM), words),
+    dimensions.map(({ fromM, toM, words, asked }, index) =>
+      uprightDimension(uprightX[index] ?? 0, place.y(fromM), place.y(toM), words, { asked }),
     ),
     chained &&
       dimensionChain(

@@ -2,6 +2,7 @@ import { level } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import { optionNumber } from '../forms/optionNumber.ts';
 import type { AppraisedOption, Design } from '../model.ts';
+import { ofOption } from './asked.ts';
 import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
@@ -34,9 +35,24 @@ interface Drawn {
   readonly extent: Extent;
 }
 
+const mainIndex = (option: AppraisedOption): number =>
+  Math.max(
+    0,
+    option.units.findIndex((unit, index) => unit.role === 'main' && option.designs[index] !== undefined),
+  );
+
 /** Design of the main unit of an option. */
-export const mainDesign = (option: AppraisedOption): Design | undefined =>
-  option.designs[option.units.findIndex((unit) => unit.role === 'main')] ?? option.designs[0];
+export const mainDesign = (option: AppraisedOption): Design | undefined => option.designs[mainIndex(option)];
+
+/** Path of that design. */
+export const mainDesignPath = (option: AppraisedOption): string =>
+  ofOption(option, `designs/${String(mainIndex(option))}`);
+
+/** The depths of the lines under a section. */
+const depthPaths = (option: AppraisedOption, { depthM }: Design): string[] =>
+  (depthM.support > depthM.midspan + 0.05 ? ['support', 'midspan'] : ['midspan']).map(
+    (where) => `${mainDesignPath(option)}/depthM/${where}`,
+  );
 
 function depthLines(design: Design): string[] {
   const { support, midspan } = design.depthM;
@@ -113,6 +129,7 @@ export function sectionRow(input: SectionRowInput): Piece {
               label(left + 27, foot + 4.5 + at * 16, text, {
                 size: letters.table,
                 fill: at === 0 ? colours.ink : colours.second,
+                figure: input.words?.[option.number] === undefined ? depthPaths(option, design) : undefined,
               }),
             ),
           );

@@ -130,8 +130,14 @@ export const waters = (site: Site, frame: Frame): Piece =>
 export function floodStretches(
   site: Site,
   frame: Frame,
-): { readonly levelM: number; readonly fromM: number; readonly toM: number }[] {
-  return site.waters.flatMap((water) => {
+): {
+  readonly levelM: number;
+  readonly fromM: number;
+  readonly toM: number;
+  /** Index of its water. */
+  readonly water: number;
+}[] {
+  return site.waters.flatMap((water, index) => {
     const levelM = water.floodLevelM;
     if (levelM === null) return [];
     return wetStretches(
@@ -141,7 +147,7 @@ export function floodStretches(
       Math.min(frame.toM, site.groundX[site.groundX.length - 1] ?? 0),
     )
       .filter(([from, to]) => to > water.fromM && from < water.toM)
-      .map(([fromM, toM]) => ({ levelM, fromM, toM }));
+      .map(([fromM, toM]) => ({ levelM, fromM, toM, water: index }));
   });
 }
 

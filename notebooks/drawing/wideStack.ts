@@ -1,7 +1,8 @@
 import { currencySign, length, money2, odds, plain, significant, spansText } from '../format.ts';
 import { glyph } from '../forms/glyph.ts';
 import type { AppraisedOption } from '../model.ts';
-import { spansOf, supportChainages } from './alongOption.ts';
+import { spanPaths, spansOf, supportChainages } from './alongOption.ts';
+import { ofOption, perM2Of, rangeOf, withinOf, type Asked } from './asked.ts';
 import { barredBrackets, barredWash } from './clearances.ts';
 import { dimensionChain } from './dimension.ts';
 import { elevationBody, levelRange } from './elevation.ts';
@@ -60,7 +61,7 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
   const limit = input.budget === null ? NaN : axis.x(input.budget);
   const second = { fill: colours.second, halo: true } as const;
   // Words step aside where the budget line would run through them: to its right where there is room, else to its left.
-  const atRight = (text: string, baseline: number, size: number, from: number): Piece => {
+  const atRight = (text: string, baseline: number, size: number, from: number, figure: Asked): Piece => {
     const width = textWidth(text, size);
     const home = right - width;
     const crossed = limit > home - 5 && limit < right + 5;
@@ -71,7 +72,7 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
         : limit - 6 - width >= from
           ? limit - 6 - width
           : home;
-    return label(x, baseline, text, { size, ...second });
+    return label(x, baseline, text, { size, ...second, figure });
   };
   const price = `${significant(option.pricePerM2.withApproaches, 2)} ${currencySign(input.currency)}/m²`;
   return g(
@@ -80,21 +81,29 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
       size: letters.section,
       weight: reference ? 600 : 400,
       halo: true,
+      figure: ofOption(option, 'cost/p50'),
     }),
-    atRight(`${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}`, y, letters.table, left + 44),
+    atRight(
+      `${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}`,
+      y,
+      letters.table,
+      left + 44,
+      rangeOf(option, 'cost'),
+    ),
     el('path', {
       d: `M${num(left)},${num(y + 16)}H${num(right)}`,
       stroke: colours.grid,
       'stroke-width': pens.fine,
     }),
     interval(option, axis.x, y + 16, ink),
-    label(left, y + 37, price, { size: letters.table, ...second }),
+    label(left, y + 37, price, { size: letters.table, ...second, figure: perM2Of(option) }),
     within !== undefined &&
       atRight(
         `${odds(within)} % within budget`,
         y + 37,
         letters.drawing,
         left + textWidth(price, letters.table) + 10,
+        withinOf(option),
       ),
   );
 }
@@ -126,6 +135,7 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
         halo: true,
         size: narrowest > 30 ? letters.table : letters.drawing,
         colour: colours.ink,
+        asked: spanPaths(option),
       },
     ),
     figures(shared, option, bodyPx + 22, input.widthPx, Math.min(figureY, bottom - 42)),

@@ -1,3 +1,4 @@
+import { ofOption, type Asked } from '../drawing/asked.ts';
 import { rangePanels, rangeTable } from '../charts/rangePanels.ts';
 import { tableBehind } from '../charts/table.ts';
 import { tradeOffs, tradeOffTable, type Measure } from '../charts/tradeOffs.ts';
@@ -5,7 +6,7 @@ import type { Appraisal, AppraisedOption, Spread } from '../../lib/index.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
-import { mainDesign } from '../drawing/sectionRow.ts';
+import { mainDesign, mainDesignPath } from '../drawing/sectionRow.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
 
@@ -16,16 +17,23 @@ function measure(
   name: string,
   places: number,
   valueOf: (option: AppraisedOption) => Spread | null,
+  figures: (option: AppraisedOption) => Asked,
 ): Measure {
   const values = appraisal.options.flatMap((option) => {
     const value = valueOf(option);
     return value ? [[option.number, value] as const] : [];
   });
-  return { name, places, values: Object.fromEntries(values) };
+  return { name, places, figures, values: Object.fromEntries(values) };
 }
 
 const months = (appraisal: Appraisal): Measure =>
-  measure(appraisal, 'Programme, months', 0, (option) => option.months);
+  measure(
+    appraisal,
+    'Programme, months',
+    0,
+    (option) => option.months,
+    (option) => ofOption(option, 'months/p50'),
+  );
 
 /** Permanent reaction of the deck on all its supports over the deck area, t/m2: what foundations and an earthquake feel. */
 function deckWeight(option: AppraisedOption): Spread {
@@ -34,6 +42,14 @@ function deckWeight(option: AppraisedOption): Spread {
     .reduce((sum, r) => sum + r.permanentKN, 0);
   return certain(permanent / 9.81 / option.deckAreaM2);
 }
+
+/** Reactions and area it was made from. */
+const deckWeightFigures = (option: AppraisedOption): string[] => [
+  ...option.designs.flatMap((design, u) =>
+    design.reactions.map((_, r) => ofOption(option, `designs/${u}/reactions/${r}/permanentKN`)),
+  ),
+  ofOption(option, 'deckAreaM2'),
+];
 
 /** Section 8: time on site. Carbon and upkeep join when they are worked out. */
 export function programmeSection(page: Sheet, cells: StudyCells): LineSection {
@@ -82,11 +98,15 @@ export function tradeOffSection(page: Sheet, cells: StudyCells): LineSection {
             budget: budgetOf(v.brief),
             currency: v.appraisal.currency,
             measures: [
-              measure(v.appraisal, 'Depth of the main unit, m', 2, (option) =>
-                certain(mainDesign(option)?.depthM.support ?? option.depthM.support),
+              measure(
+                v.appraisal,
+                'Depth of the main unit, m',
+                2,
+                (option) => certain(mainDesign(option)?.depthM.support ?? option.depthM.support),
+                (option) => `${mainDesignPath(option)}/depthM/support`,
               ),
               months(v.appraisal),
-              measure(v.appraisal, 'Weight of the deck, t/m²', 2, deckWeight),
+              measure(v.appraisal, 'Weight of the deck, t/m²', 2, deckWeight, deckWeightFigures),
             ],
             widthPx: room.widthPx,
             prefix: 'trade',

@@ -1,7 +1,7 @@
 import { checkBars, checkTable } from '../charts/checkBars.ts';
 import { tableBehind } from '../charts/table.ts';
 import { section } from '../drawing/section.ts';
-import { mainDesign, sectionRow } from '../drawing/sectionRow.ts';
+import { mainDesign, mainDesignPath, sectionRow } from '../drawing/sectionRow.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
@@ -32,13 +32,23 @@ export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
         const checks = {
           form: v.reference.form,
           checks: design.checks,
+          design: mainDesignPath(v.reference),
           widthPx: Math.min(350, room.widthPx),
           prefix: 'checks',
         };
         return h(
           'div',
           { class: 'beside' },
-          h('div', {}, section({ design, widthPx: Math.min(580, room.widthPx), prefix: 'section' })),
+          h(
+            'div',
+            {},
+            section({
+              design,
+              path: mainDesignPath(v.reference),
+              widthPx: Math.min(580, room.widthPx),
+              prefix: 'section',
+            }),
+          ),
           h('div', {}, checkBars(checks), tableBehind(checkTable(checks))),
         );
       },
