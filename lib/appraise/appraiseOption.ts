@@ -5,7 +5,7 @@ import { expectedLines } from '../substructure/index.ts';
 import { perM2, splitQuantities } from '../takeoff/index.ts';
 import type { Drawn } from './drawn.ts';
 import { optionFacts } from './facts.ts';
-import { remembered } from './kept.ts';
+import { remembered } from '../kept.ts';
 import type { Work } from './work.ts';
 import { mainUnit, spareOf, workOption, workOptionAt, type Worked } from './workOption.ts';
 import type { Workbench } from './workbench.ts';

@@ -2,7 +2,7 @@ import { formModule } from '../forms/index.ts';
 import type { CostTable, FormId, MeasuredLine } from '../model/index.ts';
 import { expectedLines, placeText, standPierBetween } from '../substructure/index.ts';
 import type { Memory, TrialRow } from './memory.ts';
-import { remembered } from './kept.ts';
+import { remembered } from '../kept.ts';
 import { SHARES, trialRows, type FormAndMethod, type RowMakers, type TrialRows } from './trialRows.ts';
 import type { Work } from './work.ts';
 

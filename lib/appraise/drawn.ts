@@ -1,6 +1,6 @@
 import type { FormId } from '../model/index.ts';
 import { drawDrivers, drawRate, type Draws, type RateDraws } from '../price/index.ts';
-import { kept, remembered } from './kept.ts';
+import { kept, remembered } from '../kept.ts';
 import type { Workbench } from './workbench.ts';
 
 /** The draws of a study with its rates on them. */

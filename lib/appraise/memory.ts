@@ -7,7 +7,7 @@ import type {
   WorkedOption,
 } from '../model/index.ts';
 import type { Draws, PricedOption } from '../price/index.ts';
-import { kept, remembered, type Kept } from './kept.ts';
+import { kept, remembered, type Kept } from '../kept.ts';
 
 /** A trial unit of one governing span at its depth of least cost. */
 export interface TrialRow {

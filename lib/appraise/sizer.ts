@@ -1,6 +1,6 @@
 import { formModule } from '../forms/index.ts';
 import type { Design, UnitTask } from '../model/index.ts';
-import { remembered, type Kept } from './kept.ts';
+import { remembered, type Kept } from '../kept.ts';
 
 /** Sizes units and remembers them: sizing is pure, and an edit of rates or obstacles asks for the same units again. */
 export type Sizer = (task: UnitTask) => Design;

@@ -4,7 +4,7 @@ import { sideRatioWindow, spanWindow } from '../rules/index.ts';
 import { deckOnSupport } from '../substructure/index.ts';
 import { methodLines } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
-import type { Kept } from './kept.ts';
+import type { Kept } from '../kept.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { TrialRow } from './memory.ts';
 import type { Sizer } from './sizer.ts';

@@ -12,7 +12,7 @@ import {
 import { expectedLines, placeText, standOneSupport, standSupports } from '../substructure/index.ts';
 import { measure } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
-import { remembered } from './kept.ts';
+import { remembered } from '../kept.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { AtDepth } from './memory.ts';
 import type { Work } from './work.ts';

@@ -7,7 +7,7 @@ import {
   type AppraisedOption,
   type Study,
 } from '../../lib/index.ts';
-import { kept } from '../../lib/appraise/kept.ts';
+import { kept } from '../../lib/kept.ts';
 import { lowFerry } from './studies.ts';
 
 const withRiver = (study: Study, fromM: number, toM: number): Study => {

@@ -100,13 +100,14 @@ export function memberSection(
   const mostSlender = compressed
     ? trussData.memberSlenderness.compression
     : trussData.memberSlenderness.tension;
+  const leastAreaM2 = leastArea(demand, rules);
   let best: Trial | null = null;
   let stoutest = family[0]!;
   for (const profile of family) {
     if (profile.depthM > mostDepthM) break;
     stoutest = profile;
     if (slendernessOf(profile, demand.lengthM) > mostSlender) continue;
-    const leastMm = leastPlateMm(profile, compressed);
+    const leastMm = Math.max(leastPlateMm(profile, compressed), thinnestMm(profile, leastAreaM2));
     if (best !== null && best.use.utilisation <= 1 && areaOf(profile, leastMm) >= best.areaM2) continue;
     const trial = trialOf(profile, leastMm, demand, rules);
     if (best === null || isLighter(trial, best)) best = trial;
@@ -134,8 +135,8 @@ export function memberSection(
 }
 
 interface Use {
-  readonly utilisation: number;
-  readonly governs: MemberLimit;
+  utilisation: number;
+  governs: MemberLimit;
 }
 
 interface Trial {
@@ -164,6 +165,24 @@ function leastPlateMm(profile: Profile, compressed: boolean): number {
   return roundUp(Math.max(plateMm.least, slenderMm));
 }
 
+/** Area below which a member cannot do, m2: as if nothing buckled and every plate had the yield of the thinnest. */
+function leastArea(demand: MemberDemand, rules: MemberRules): number {
+  const r = trussData.resistance[rules.standard];
+  const fy = rules.yieldMPa(1) * 1000;
+  const net = r.fractureFactor * trussData.netAreaRatio.value * r.ultimateMPa * 1000;
+  return Math.max(
+    demand.tensionKN / (r.yieldFactor * fy),
+    demand.tensionKN / net,
+    demand.rangeKN / (rules.rangeMPa * 1000),
+    demand.compressionKN / (r.bucklingFactor * fy),
+  );
+}
+
+/** Plate under which a profile has less than an area, mm, in practical steps; corners counted twice, so never too thick. */
+function thinnestMm({ kind, widthM: w, depthM: d }: Profile, areaM2: number): number {
+  return roundUp((1000 * areaM2) / (kind === 'box' ? 2 * (w + d) : 2 * d + webShare * w));
+}
+
 /** Share of the area that works in compression: effective widths of its plates at yield (EN 1993-1-5 4.4). */
 function effectiveShare(profile: Profile, thicknessMm: number, fyMPa: number): number {
   const { kind, widthM: w, depthM: d } = profile;
@@ -183,24 +202,31 @@ function trialOf(profile: Profile, leastMm: number, demand: MemberDemand, rules:
   const { most, stepMm } = trussData.plateMm;
   let tooThin = 0;
   let thicknessMm = Math.min(leastMm, most);
-  let use = useAt(profile, thicknessMm, demand, rules);
-  while (use.utilisation > 1 && thicknessMm < most) {
+  let utilisation = useAt(use, profile, thicknessMm, demand, rules);
+  while (utilisation > 1 && thicknessMm < most) {
     tooThin = thicknessMm;
-    thicknessMm = Math.min(most, Math.max(thicknessMm + stepMm, roundUp(thicknessMm * use.utilisation)));
-    use = useAt(profile, thicknessMm, demand, rules);
+    thicknessMm = Math.min(most, Math.max(thicknessMm + stepMm, roundUp(thicknessMm * utilisation)));
+    utilisation = useAt(use, profile, thicknessMm, demand, rules);
   }
-  while (use.utilisation <= 1 && tooThin > 0 && thicknessMm - tooThin > stepMm) {
+  while (utilisation <= 1 && tooThin > 0 && thicknessMm - tooThin > stepMm) {
     const middle = roundUp((thicknessMm + tooThin) / 2 - stepMm / 2);
-    const tried = useAt(profile, middle, demand, rules);
-    if (tried.utilisation <= 1) {
-      thicknessMm = middle;
-      use = tried;
-    } else tooThin = middle;
+    if (useAt(use, profile, middle, demand, rules) <= 1) thicknessMm = middle;
+    else tooThin = middle;
   }
-  return { profile, thicknessMm, areaM2: areaOf(profile, thicknessMm), use };
+  useAt(use, profile, thicknessMm, demand, rules);
+  return { profile, thicknessMm, areaM2: areaOf(profile, thicknessMm), use: { ...use } };
 }
 
-function useAt(profile: Profile, thicknessMm: number, demand: MemberDemand, rules: MemberRules): Use {
+const use: Use = { utilisation: 0, governs: 'yield' };
+
+/** Writes the use of a section and what governs it into `out`; returns the use. */
+function useAt(
+  out: Use,
+  profile: Profile,
+  thicknessMm: number,
+  demand: MemberDemand,
+  rules: MemberRules,
+): number {
   const areaM2 = areaOf(profile, thicknessMm);
   const fy = rules.yieldMPa(thicknessMm);
   const r = trussData.resistance[rules.standard];
@@ -234,7 +260,9 @@ function useAt(profile: Profile, thicknessMm: number, demand: MemberDemand, rule
       governs = 'buckling';
     }
   }
-  return { utilisation, governs };
+  out.utilisation = utilisation;
+  out.governs = governs;
+  return utilisation;
 }
 
 /** AASHTO LRFD 6.9.4.1: 0.658^(lambda2), or 0.877 / lambda2 beyond 2.25 (Pe/Po below 0.44). */

@@ -1,4 +1,5 @@
 import { trafficOnInfluence, type TrafficLoad } from '../../actions/index.ts';
+import { kept, remembered } from '../../kept.ts';
 import { loadTrack } from '../../mechanics/index.ts';
 import { fatigueRange } from '../floor/fatigue.ts';
 import { trussGeometry, type MemberRole, type TrussGeometry } from './trussGeometry.ts';
@@ -35,14 +36,28 @@ export function panelForces(
   traffic: TrafficLoad,
   fatigueShare: number,
 ): PanelForces {
+  const key = JSON.stringify([spanM, panels, hangers, traffic, fatigueShare]);
+  return remembered(known, key, () => placed(spanM, panels, hangers, traffic, fatigueShare));
+}
+
+/** Trial depths of the floor ask for the same panels again. */
+const known = kept<PanelForces>(200);
+
+function placed(
+  spanM: number,
+  panels: number,
+  hangers: boolean,
+  traffic: TrafficLoad,
+  fatigueShare: number,
+): PanelForces {
   const geometry = trussGeometry(spanM, referenceM, panels, hangers);
   const track = loadTrack(geometry.nodesM);
   const members = geometry.members.map(({ role, influence }) => {
     const perNode = influence.reduce((sum, v) => sum + v, 0);
-    const placed = trafficOnInfluence(traffic, track, influence);
+    const moving = trafficOnInfluence(traffic, track, influence);
     const range =
       fatigueShare * fatigueRange(traffic.standard, track, influence, fatigueLengthM(role, geometry));
-    return { perNode, trafficMax: placed.max, trafficMin: placed.min, fatigueRange: range };
+    return { perNode, trafficMax: moving.max, trafficMin: moving.min, fatigueRange: range };
   });
   return { spanM, panels, hangers, members };
 }

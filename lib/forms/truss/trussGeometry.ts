@@ -1,3 +1,5 @@
+import { kept, remembered } from '../../kept.ts';
+
 /** What a truss member is for: it decides section, buckling curve and take-off. */
 export type MemberRole = 'bottom-chord' | 'top-chord' | 'end-post' | 'diagonal' | 'hanger' | 'post';
 
@@ -55,6 +57,15 @@ export function trussGeometry(
     throw new RangeError(
       `truss: expected ${hangers ? 'an even number of panels, at least 4' : 'at least 3 panels'}, received ${panels}`,
     );
+  return remembered(known, `${spanM} ${heightM} ${panels} ${hangers}`, () =>
+    laidOut(spanM, heightM, panels, hangers),
+  );
+}
+
+/** Trial depths of the floor ask for the same trusses again. */
+const known = kept<TrussGeometry>(500);
+
+function laidOut(spanM: number, heightM: number, panels: number, hangers: boolean): TrussGeometry {
   const panelM = spanM / panels;
   const nodesM = Float64Array.from({ length: panels + 1 }, (_, j) => j * panelM);
   const members = hangers ? hangerMembers(spanM, heightM, panels) : plainMembers(spanM, heightM, panels);
