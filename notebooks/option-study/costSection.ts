@@ -5,7 +5,7 @@ import { costIntervals, costTable } from '../charts/costIntervals.ts';
 import { oddsMatrix, oddsTable } from '../charts/oddsMatrix.ts';
 import { tableBehind } from '../charts/table.ts';
 import { h } from '../html.ts';
-import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
+import { pushed, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import { madeFigure } from './madeFigure.ts';
 import type { StudyCells } from './studyCells.ts';
@@ -91,7 +91,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
       wide: true,
       body: (v, room) => {
         const input = common(v, room.widthPx, 'parts');
-        return [costByPart(input), tableBehind(partTable(input))];
+        return [pushed('Cost by part', costByPart(input)), tableBehind(partTable(input))];
       },
       notes: [h('p', {}, 'Medians of the parts; medians do not add up to the median of the whole.')],
     }),
@@ -124,7 +124,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
       shows,
       body: (v, room) => {
         const input = { ...common(v, room.widthPx, 'odds'), unseparated: v.books.unseparated };
-        return [oddsMatrix(input), tableBehind(oddsTable(input))];
+        return [pushed('Odds', oddsMatrix(input)), tableBehind(oddsTable(input))];
       },
       notes: [
         h('p', {}, 'Read a row: odds in per cent that the option at the left is the cheaper, in steps of 5.'),

@@ -5,13 +5,8 @@ import { mainDesign, mainDesignPath, sectionRow } from '../drawing/sectionRow.ts
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
-import type { AppraisedOption } from '../../lib/index.ts';
 import type { StudyCells } from './studyCells.ts';
-
-/** The first option of each form, in order. */
-export function firstOfEachForm(options: readonly AppraisedOption[]): AppraisedOption[] {
-  return [...new Map([...options].reverse().map((option) => [option.form, option])).values()].reverse();
-}
+import { firstOfEachForm } from './words.ts';
 
 /** Section 5: the cross-section of the reference with its checks, the others beside it. */
 export function sectionSection(page: Sheet, cells: StudyCells): LineSection {

@@ -23,6 +23,11 @@ export const pricesWords = (study: Pick<Study, 'brief' | 'books'>): string =>
 export const optionWords = (option: AppraisedOption): string =>
   `${optionTitle(option)} at ${spansText(spansOf(option))} m`;
 
+/** The first option of each form, in order. */
+export function firstOfEachForm(options: readonly AppraisedOption[]): AppraisedOption[] {
+  return options.filter((option, i) => options.findIndex(({ form }) => form === option.form) === i);
+}
+
 /** The page's answer in one or two sentences. */
 export function answerWords({ options, standing, currency }: Appraisal): string {
   const leader = options.find((option) => option.number === standing.leader);
@@ -33,7 +38,7 @@ export function answerWords({ options, standing, currency }: Appraisal): string 
   const first = `${optionWords(leader)} come out at ${money2(p50 / unit.per)} ${unit.label}, between ${range}.`;
   const group = standing.groups.find((one) => one.includes(leader.number)) ?? [];
   const others = options.filter((option) => group.includes(option.number) && option.form !== leader.form);
-  const rivals = [...new Map(others.map((option) => [option.form, option])).values()];
+  const rivals = firstOfEachForm(others);
   if (rivals.length === 0) {
     const next = options.find((option) => option.form !== leader.form && option.status !== 'out');
     if (!next) return first;

@@ -116,6 +116,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   let progress: Progress | undefined;
   let drawn: { readonly values: Values<U>; readonly room: Room } | undefined;
   let drawnAt: Date | undefined;
+  /** Width of the body as last observed: to ask for it between drawings would lay the whole page out each time. */
+  let bodyPx = 0;
   let isOwed = false;
   let bodyError: unknown;
   let paper: Room | null = null;
@@ -136,7 +138,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   };
 
   const draw = (): void => {
-    const widthPx = paper?.widthPx ?? body.clientWidth;
+    const widthPx = paper?.widthPx ?? bodyPx;
     const values = 'value' in state ? state.value : undefined;
     if (values === undefined || widthPx === 0) return;
     const room = { widthPx, isPaper: paper !== null };
@@ -226,7 +228,10 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
         };
         stops.push(graph.watch(cell, watch));
       }
-      const watcher = new ResizeObserver(updateSoon);
+      const watcher = new ResizeObserver(() => {
+        bodyPx = body.clientWidth;
+        updateSoon();
+      });
       watcher.observe(body);
       stops.push(() => watcher.disconnect());
     },

@@ -18,6 +18,7 @@ export type { ScaleMark } from './figureScale.ts';
 export { choiceInput, type Choice, type ChoiceInput, type ChoiceSpec } from './choiceInput.ts';
 export { wordsInput, type WordsInput, type WordsSpec } from './wordsInput.ts';
 export { standing, type StandingSpec } from './standing.ts';
+export { pushed } from './pushed.ts';
 export { draggable, type Drag, type DragAt } from './dragging.ts';
 export { undoKeys, type Undoable } from './undoKeys.ts';
 export { waysOn, type Way } from './refusal.ts';

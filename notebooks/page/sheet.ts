@@ -76,6 +76,7 @@ const bar = ({ pages, tools }: BarSpec): HTMLElement =>
     h(
       'div',
       { class: 'bar' },
+      h('span', { class: 'wordmark' }, 'Spanledger'),
       pages.map(({ words, href, here }) => h('a', { href, 'aria-current': here === true && 'page' }, words)),
       h('span', { class: 'apart' }),
       tools,

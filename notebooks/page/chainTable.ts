@@ -1,0 +1,99 @@
+import type { Figure, FigureKind } from '../../lib/index.ts';
+import { h, type HtmlChild } from '../html.ts';
+import type { ChainRow } from './figureChain.ts';
+import { valueWords } from './figureValue.ts';
+
+/** Further in than this the lines stand below one another. */
+const DEEPEST = 8;
+
+const looks: Readonly<Record<FigureKind, string>> = {
+  typed: 'fig typed',
+  preset: 'fig preset',
+  unknown: 'fig unknown',
+  computed: 'fig',
+};
+
+const kinds: Readonly<Record<FigureKind, string>> = {
+  typed: 'typed here',
+  preset: 'preset, to be confirmed',
+  unknown: 'not known',
+  computed: '',
+};
+
+const sentence = (words: readonly string[]): string =>
+  words.filter((one, i) => one !== '' && words.indexOf(one) === i).join('; ');
+
+/** Range of a figure that is a likely value: 'between 5.0 and 8.3 M€'. */
+function rangeWords({ path, unit, range }: Figure): string {
+  if (range === undefined || !path.endsWith('/p50')) return '';
+  const [low, high] = [range.p10, range.p90].map((value) => valueWords({ path, value, unit }));
+  return low === high ? '' : `10 to 90 %: ${low ?? ''} to ${high ?? ''}`;
+}
+
+/** How a figure was found and after what: method and formula, then each source with whether it was read. */
+function because(figure: Figure): HtmlChild {
+  const { method, formula, sources } = figure.because;
+  return [
+    sentence([kinds[figure.kind], method === kinds[figure.kind] ? '' : method, formula, rangeWords(figure)]),
+    sources.map(({ text, read }) =>
+      h('span', { class: 'source' }, text.replace(/\.$/u, ''), '; ', read ? h('b', {}, 'read') : h('i', {}, 'from memory')),
+    ),
+  ];
+}
+
+function cellsOf(row: ChainRow): readonly [first: HtmlChild, second: HtmlChild] {
+  if (row.kind === 'used by') return [h('span', { class: 'name' }, 'Used by'), ''];
+  if (row.kind === 'more') {
+    const { count = 0 } = row;
+    return [h('span', { class: 'name' }, count === 0 ? 'no other figure' : `${String(count)} more`), ''];
+  }
+  const { figure } = row;
+  if (figure === null) return [h('span', { class: 'name' }, row.path), 'not in the latest appraisal'];
+  return [
+    [
+      h('span', { class: looks[figure.kind] }, valueWords(figure)),
+      ' ',
+      h('span', { class: 'name' }, figure.label),
+    ],
+    because(figure),
+  ];
+}
+
+/** Whether a line can be opened. */
+export const canOpen = (row: ChainRow): boolean =>
+  row.kind === 'used by' || (row.kind === 'more' ? (row.count ?? 0) > 0 : row.figure !== null);
+
+/**
+ * The lines of a chain as a table: value and name further in with each step, how it was found, and where it is shown.
+ * @param stationOf the station where a figure is shown, e.g. '7+020'
+ * @param current key of the line that keys act on
+ */
+export function chainLines(
+  rows: readonly ChainRow[],
+  stationOf: (path: string) => string | undefined,
+  current: string | undefined,
+): HTMLElement[] {
+  return rows.map((row) => {
+    const [first, second] = cellsOf(row);
+    const station = row.kind === 'figure' ? stationOf(row.path) : undefined;
+    const isCurrent = row.key === current;
+    return h(
+      'tr',
+      {
+        class: `step-${String(Math.min(row.step, DEEPEST))}${canOpen(row) ? ' opens' : ''}`,
+        'data-row': row.key,
+        'data-path': row.kind === 'figure' ? row.path : null,
+        tabindex: isCurrent ? 0 : -1,
+        'aria-level': row.step + 1,
+        'aria-expanded': canOpen(row) ? String(row.isOpen) : null,
+      },
+      h('td', { role: 'gridcell' }, first),
+      h('td', { role: 'gridcell', class: 'how' }, second),
+      h(
+        'td',
+        { role: 'gridcell', class: 'at' },
+        station !== undefined && h('a', { href: `#${station}`, tabindex: isCurrent ? 0 : -1 }, station),
+      ),
+    );
+  });
+}

@@ -1,0 +1,47 @@
+import type { Figure } from '../../lib/index.ts';
+import { currencySign, fixed, money2, moneyUnit, odds, significant } from '../format.ts';
+
+type Valued = Pick<Figure, 'path' | 'value' | 'unit'>;
+
+/** A unit as it is printed: 'kg/m2' -> 'kg/m²', 'EUR/kg' -> '€/kg', 'deg' -> '°'; a count has none. */
+export function unitWords(unit: string): string {
+  if (unit === 'no') return '';
+  return unit
+    .replace(/\b[A-Z]{3}\b/u, (currency) => currencySign(currency))
+    .replace(/(?<=m)[234]/gu, (power) => ({ 2: '²', 3: '³' })[Number(power)] ?? '⁴')
+    .replace(/^deg$/u, '°');
+}
+
+/** Metres: chainages to the decimetre, lengths and levels to the centimetre, plates to the millimetre. */
+function metres(value: number): string {
+  const size = Math.abs(value);
+  if (size >= 200) return fixed(value, Number.isInteger(value) ? 0 : 1);
+  return size >= 0.1 || size < 0.0005 ? fixed(value, 2) : fixed(value, 3);
+}
+
+function number(value: number, unit: string): string {
+  if (unit === 'm') return metres(value);
+  if (unit === '' || unit === 'no') {
+    if (Number.isInteger(value)) return fixed(value, 0);
+  }
+  if (Math.abs(value) < 1e-9) return '0';
+  return significant(value, unit === 'months' ? 2 : 3);
+}
+
+/**
+ * A figure of the study as it is printed, with its unit: no finer than its accuracy, costs to two significant figures,
+ * odds in steps of 5 %.
+ */
+export function valueWords({ path, value, unit }: Valued): string {
+  if (value === null || value === 'unknown') return 'unknown';
+  if (typeof value === 'boolean') return value ? 'yes' : 'no';
+  if (typeof value === 'string') return value;
+  if (/^standing\/(?:odds|within)\//u.test(path)) return `${odds(value)} %`;
+  if (/^[A-Z]{3}$/u.test(unit)) {
+    if (Math.abs(value) < 1000) return `${money2(value)} ${currencySign(unit)}`;
+    const scale = moneyUnit(unit, Math.abs(value));
+    return `${money2(value / scale.per)} ${scale.label}`;
+  }
+  const text = path.includes('/pricePerM2/') ? money2(value) : number(value, unit);
+  return `${text} ${unitWords(unit)}`.trimEnd();
+}
