@@ -1,4 +1,4 @@
-import { CROSSFALL } from '../../../lib/index.ts';
+import { CROSSFALL, type Brief } from '../../../lib/index.ts';
 import { deckStrips } from '../../drawing/deckStrips.ts';
 import { largestScale, type Scale } from '../../drawing/scale.ts';
 import { scaleBar } from '../../drawing/scaleBar.ts';
@@ -7,6 +7,7 @@ import { toDom } from '../../drawing/toDom.ts';
 import { h } from '../../html.ts';
 import { standing, type Path, type StudyStore } from '../../page/index.ts';
 import type { Graph } from '../../reactive/index.ts';
+import { sayIn } from './fieldTable.ts';
 import { problemBeside } from './problemBeside.ts';
 import { DECK_MARGIN_PX, drawnWidths, stripChainFields } from './stripChainFields.ts';
 import { hasUltimate } from './stripEdits.ts';
@@ -42,8 +43,7 @@ export function deckField(graph: Graph, store: StudyStore): HTMLElement {
       more.addEventListener('toggle', () => {
         isOpen = more.open;
       });
-      fields.follow([list], ({ brief }, problems) => {
-        const { deck, surfacingM } = brief;
+      const draw = ({ deck, surfacingM }: Brief): void => {
         const widths = drawnWidths(deck, 'present');
         const most = Math.max(
           ...[widths, drawnWidths(deck, 'ultimate')].map((all) => all.reduce((sum, one) => sum + one, 0)),
@@ -62,7 +62,13 @@ export function deckField(graph: Graph, store: StudyStore): HTMLElement {
         present.show(deck, scale);
         ultimate.show(deck, scale);
         later.textContent = hasUltimate(deck) ? 'Ultimate layout' : 'Ultimate layout: the same widths';
-        told.textContent = problems.map(problemBeside).join(' ');
+      };
+      let before: Brief | undefined;
+      fields.follow([list], ({ brief }, problems) => {
+        // The study keeps what has not changed as it was: the deck is drawn anew only when it is another one.
+        if (brief.deck !== before?.deck || brief.surfacingM !== before.surfacingM) draw(brief);
+        before = brief;
+        sayIn(told, problems.map(problemBeside).join(' '));
       });
       return h(
         'div',

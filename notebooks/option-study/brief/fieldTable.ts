@@ -52,3 +52,8 @@ export function focusField(within: Element, key: string): void {
   const field = entry?.querySelector('.fig') ?? entry;
   if (field instanceof HTMLElement) field.focus();
 }
+
+/** Says words in a place, and leaves it alone while it says them already. */
+export function sayIn(place: Element, words: string): void {
+  if (place.textContent !== words) place.textContent = words;
+}

@@ -121,9 +121,11 @@ const perCent = (share: number): string =>
 /** What the odds of a stretch add up to; where that is not 100 %, what is missing and who could take it. */
 function sum(fields: Fields, store: StudyStore, index: number): HTMLElement {
   const said = h('div', { class: 'sum', role: 'status' });
+  let before: GroundStretch | undefined;
   fields.follow([[...list, index, 'classes']], ({ brief }) => {
     const stretch = brief.groundStretches[index];
-    if (stretch === undefined) return;
+    if (stretch === undefined || stretch === before) return;
+    before = stretch;
     const missing = missingOdds(stretch.classes);
     said.classList.toggle('refusal', missing !== 0);
     if (missing === 0) {
@@ -136,13 +138,11 @@ function sum(fields: Fields, store: StudyStore, index: number): HTMLElement {
     const give = (): void =>
       store.edit((study) => putAt(study, [...list, index, 'classes', c, 'odds'], odds), { what: 'odds' });
     const name = shortNames[likely.ground];
-    const words =
-      missing > 0
-        ? `The odds add up to ${perCent(1 - missing)} %: ${perCent(missing)} % are missing.`
-        : `The odds add up to ${perCent(1 - missing)} %: ${perCent(-missing)} % too many.`;
+    const sum = `The odds add up to ${perCent(1 - missing)} %`;
+    const rest = missing > 0 ? `${perCent(missing)} % are missing` : `${perCent(-missing)} % too many`;
     const way = missing > 0 ? `Give them to ${name}` : `Take them from ${name}`;
     said.replaceChildren(
-      h('span', { class: 'why' }, `${words} The last valid study is kept.`),
+      h('span', { class: 'why' }, `${sum}: ${rest}. The last valid study is kept.`),
       ...(odds >= 0 ? waysOn([{ words: way, take: give }]) : []),
     );
   });

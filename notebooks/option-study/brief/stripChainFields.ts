@@ -8,7 +8,7 @@ import { fixed } from '../../format.ts';
 import { h } from '../../html.ts';
 import type { Fields, Figure, Made, Path, StudyStore } from '../../page/index.ts';
 import { putAt } from '../../page/index.ts';
-import { listAction, saidBelow } from './fieldTable.ts';
+import { listAction, saidBelow, sayIn } from './fieldTable.ts';
 import { withEntry, withoutEntry } from './listEdits.ts';
 import { stripForGap, withStripWidth } from './stripEdits.ts';
 import { stripLayout } from './stripLayout.ts';
@@ -79,7 +79,7 @@ function stripWords(
   if (layout === 'ultimate') {
     const name = h('span', { class: 'name' });
     fields.follow([], ({ brief }) => {
-      name.textContent = brief.deck[index]?.kind ?? '';
+      sayIn(name, brief.deck[index]?.kind ?? '');
     });
     return h('div', { class: 'strip' }, width, name);
   }
