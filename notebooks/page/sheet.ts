@@ -6,6 +6,7 @@ import { cellHost } from './cellHost.ts';
 import { exchange } from './exchange.ts';
 import { frames } from './frames.ts';
 import { lateness } from './lateness.ts';
+import { saveTables } from './tableFile.ts';
 import type { LineSection } from './stationLines.ts';
 import { stationLines } from './stationLines.ts';
 import type { Station } from './ties.ts';
@@ -183,6 +184,7 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
     },
 
     mount(root, spec) {
+      saveTables(element);
       ({ sections } = spec);
       known = hosts().map(({ station, shows, owns }) => ({ name: station, shows, owns }));
       const { hint = usualHint } = spec;

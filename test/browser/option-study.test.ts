@@ -130,3 +130,19 @@ describe('option study', () => {
     silent(heard);
   });
 });
+
+it('a table behind a chart is saved as CSV with plain figures', async () => {
+  const { page, heard } = await site.open('option-study.html');
+  await settled(page);
+  const table = page.locator('#s7 details.behind').first();
+  await table.locator('summary').click();
+  const [download] = await Promise.all([page.waitForEvent('download'), table.locator('button.csv').click()]);
+  const stream = await download.createReadStream();
+  let text = '';
+  for await (const piece of stream) text += String(piece);
+  const [head, ...rows] = text.trim().split('\n');
+  expect(head).toContain(',');
+  expect(rows.length).toBeGreaterThanOrEqual(4);
+  expect(text).not.toMatch(/[\u2009\u2212]/u);
+  silent(heard);
+});
