@@ -10,6 +10,7 @@ import { compositeFigures } from '../forms/composite-i/figures.ts';
 import { boxFigures } from '../forms/concrete-box/figures.ts';
 import { designFigures } from '../forms/figures.ts';
 import { floorPractice } from '../forms/floor/floorFigures.ts';
+import { slabBridgeFigures } from '../forms/slab/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
 import { priceFigures } from '../price/figures.ts';
@@ -36,6 +37,7 @@ export const manual: readonly Descriptor[] = [
   ...windowFigures,
   ...arrangementFigures,
   // A form speaks for its own figures first.
+  ...slabBridgeFigures,
   ...compositeFigures,
   ...boxFigures,
   ...trussFigures,

@@ -5,6 +5,7 @@ import fatigue from '../../data/forms/fatigue.json';
 import floor from '../../data/forms/floor.json';
 import plates from '../../data/forms/plates.json';
 import slab from '../../data/forms/slab.json';
+import slabDeck from '../../data/forms/slab-deck.json';
 import truss from '../../data/forms/truss.json';
 import ground from '../../data/ground.json';
 import materials from '../../data/materials.json';
@@ -26,6 +27,7 @@ const files: Readonly<Record<string, unknown>> = {
   lm1,
   hl93,
   slab,
+  'slab-deck': slabDeck,
   floor,
   plates,
   fatigue,

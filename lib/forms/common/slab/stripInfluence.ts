@@ -15,6 +15,7 @@ const terms = 21;
  *
  * Fourier series across the span with the closed solution along the edges (Levy; Timoshenko and Woinowsky-Krieger,
  * Theory of Plates and Shells, infinitely long plate with simply supported edges). 0 < sectionM < spanM.
+ * @param direction moment in the direction of the span, or along the supported edges
  */
 export function stripInfluence(
   spanM: number,
@@ -22,8 +23,10 @@ export function stripInfluence(
   row: PatchRow,
   poisson: number,
   steps: number,
+  direction: 'span' | 'edges' = 'span',
 ): Float64Array {
   const influence = new Float64Array(steps + 1);
+  const reach = direction === 'span' ? reachAlongSpan : reachAlongEdges;
   const halfSpanSide = row.sideSpanM / 2;
   const halfAlong = row.sideAlongM / 2;
   for (let n = 1; n <= terms; n++) {
@@ -41,8 +44,15 @@ export function stripInfluence(
 }
 
 /** Moment amplitude of one sine term loaded from the section to a distance `a` along the edges (odd in `a`). */
-function reach(alpha: number, a: number, poisson: number): number {
+function reachAlongSpan(alpha: number, a: number, poisson: number): number {
   const d = Math.abs(a);
   const decayed = (2 + (1 - poisson) * alpha * d) * Math.exp(-alpha * d);
   return (Math.sign(a) * (2 - decayed)) / (4 * alpha * alpha);
+}
+
+/** The same for the moment along the supported edges: (-w,yy - nu w,xx) in place of (-w,xx - nu w,yy). */
+function reachAlongEdges(alpha: number, a: number, poisson: number): number {
+  const d = Math.abs(a);
+  const decayed = (2 * poisson - (1 - poisson) * alpha * d) * Math.exp(-alpha * d);
+  return (Math.sign(a) * (2 * poisson - decayed)) / (4 * alpha * alpha);
 }
