@@ -10,6 +10,7 @@ import { compositeFigures } from '../forms/composite-i/figures.ts';
 import { boxFigures } from '../forms/concrete-box/figures.ts';
 import { designFigures } from '../forms/figures.ts';
 import { floorPractice } from '../forms/floor/floorFigures.ts';
+import { precastManual } from '../forms/precast-i/figures.ts';
 import { slabBridgeFigures } from '../forms/slab/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
@@ -40,6 +41,7 @@ export const manual: readonly Descriptor[] = [
   ...slabBridgeFigures,
   ...compositeFigures,
   ...boxFigures,
+  ...precastManual,
   ...trussFigures,
   ...cableFigures,
   ...floorPractice,

@@ -4,6 +4,7 @@ import concreteBox from '../../data/forms/concrete-box.json';
 import fatigue from '../../data/forms/fatigue.json';
 import floor from '../../data/forms/floor.json';
 import plates from '../../data/forms/plates.json';
+import precastI from '../../data/forms/precast-i.json';
 import slab from '../../data/forms/slab.json';
 import slabDeck from '../../data/forms/slab-deck.json';
 import truss from '../../data/forms/truss.json';
@@ -33,6 +34,7 @@ const files: Readonly<Record<string, unknown>> = {
   fatigue,
   'composite-i': compositeI,
   'concrete-box': concreteBox,
+  'precast-i': precastI,
   truss,
   'cable-stayed': cableStayed,
 };

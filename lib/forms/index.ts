@@ -3,6 +3,7 @@ import { cableStayed } from './cable-stayed/index.ts';
 import { compositeI } from './composite-i/index.ts';
 import { concreteBox } from './concrete-box/index.ts';
 import type { FormModule } from './formModule.ts';
+import { precastI } from './precast-i/index.ts';
 import { slab } from './slab/index.ts';
 import { truss } from './truss/index.ts';
 
@@ -11,6 +12,7 @@ export type { FormModule, Pattern } from './formModule.ts';
 /** Every form the tool can size, by id. Adding a form is one line here beside its folder. */
 export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   slab,
+  'precast-i': precastI,
   'composite-i': compositeI,
   'concrete-box': concreteBox,
   truss,

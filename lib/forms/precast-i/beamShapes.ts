@@ -1,0 +1,128 @@
+import { z } from 'zod';
+import json from '../../../data/girders/aashto-pci.json';
+import { polygonProperties, type SectionPoint } from '../../mechanics/index.ts';
+import type { StandardId } from '../../model/index.ts';
+import { precastData } from './precastData.ts';
+import { strandRows, type StrandRow } from './strandRows.ts';
+
+/** A precast beam: outline, section and where its strands fit. Lengths m, z up from the soffit. */
+export interface BeamShape {
+  readonly name: string;
+  readonly depthM: number;
+  readonly webM: number;
+  readonly topWidthM: number;
+  readonly bottomWidthM: number;
+  /** Height of the full bottom flange, m. */
+  readonly bottomFlangeM: number;
+  readonly points: readonly SectionPoint[];
+  readonly areaM2: number;
+  readonly centroidM: number;
+  readonly inertiaM4: number;
+  readonly inertiaYM4: number;
+  readonly perimeterM: number;
+  /** Rows from the bottom up. */
+  readonly rows: readonly StrandRow[];
+}
+
+const point = z.tuple([z.number(), z.number()]);
+const girder = z.object({
+  name: z.string(),
+  profileIn: z.array(point).min(4),
+  published: z.object({
+    areaIn2: z.number(),
+    bottomIn: z.number(),
+    inertiaIn4: z.number(),
+    inertiaYIn4: z.number().optional(),
+  }),
+});
+
+/** Published I-girders with their published properties, in inches; `data/girders/aashto-pci.json`. */
+export const catalogue = z.object({ girders: z.array(girder).min(1) }).parse(json).girders;
+
+const inch = 0.0254;
+
+/** Beam of a profile of [height, full width] pairs from the soffit up, m. */
+function beamShape(
+  name: string,
+  profile: readonly (readonly [number, number])[],
+  standard: StandardId,
+): BeamShape {
+  const right = profile.map(([z, width]): SectionPoint => [width / 2, z]);
+  const left = [...profile].reverse().map(([z, width]): SectionPoint => [-width / 2, z]);
+  const points = [...right, ...left];
+  const depthM = profile[profile.length - 1]![0];
+  return {
+    name,
+    depthM,
+    webM: Math.min(...profile.map(([, width]) => width)),
+    topWidthM: profile[profile.length - 1]![1],
+    bottomWidthM: profile[0]![1],
+    bottomFlangeM: profile[1]![0],
+    points,
+    ...polygonProperties(points),
+    rows: strandRows(points, depthM, standard),
+  };
+}
+
+/** The published girder of that name. @throws RangeError for a name that is not in the catalogue */
+export function catalogueBeam(name: string): BeamShape {
+  const found = catalogue.find((one) => one.name === name);
+  if (!found)
+    throw new RangeError(
+      `girder: expected one of ${catalogue.map((one) => one.name).join(', ')}, received ${name}`,
+    );
+  return beamShape(
+    name,
+    found.profileIn.map(([z, width]) => [z * inch, width * inch] as const),
+    'hl93',
+  );
+}
+
+/** Metric bulb-tee of a depth, m: web constant, flanges growing with depth. */
+export function bulbTee(depthM: number, standard: StandardId): BeamShape {
+  const d = precastData.bulbTee;
+  const bottom = d.bottomWidthM.base + d.bottomWidthM.perDepth * depthM;
+  const top = d.topWidthM.base + d.topWidthM.perDepth * depthM;
+  const taper = (d.bottomTaper * (bottom - d.webM)) / 2;
+  return beamShape(
+    `bulb-tee ${(depthM * 1000).toFixed(0)}`,
+    [
+      [0, bottom],
+      [d.bottomM, bottom],
+      [d.bottomM + taper, d.webM],
+      [depthM - d.topM - d.topTaperM, d.webM],
+      [depthM - d.topM, top],
+      [depthM, top],
+    ],
+    standard,
+  );
+}
+
+const shapes = new Map<StandardId, readonly BeamShape[]>();
+
+/**
+ * Beams of a market, shallowest first: the published girders under AASHTO with metric bulb-tees where they end, metric
+ * bulb-tees elsewhere.
+ */
+export function beamShapes(standard: StandardId): readonly BeamShape[] {
+  const known = shapes.get(standard);
+  if (known) return known;
+  const { leastDepthM, mostDepthM, stepM } = precastData.bulbTee;
+  const published = standard === 'hl93' ? catalogue.map(({ name }) => catalogueBeam(name)) : [];
+  const from = Math.max(leastDepthM - stepM / 2, ...published.map((one) => one.depthM));
+  const steps = Math.round((mostDepthM - leastDepthM) / stepM);
+  const metric = Array.from({ length: steps + 1 }, (_, i) => leastDepthM + i * stepM)
+    .filter((depthM) => depthM > from)
+    .map((depthM) => bulbTee(depthM, standard));
+  const made = [...published, ...metric].sort((a, b) => a.depthM - b.depthM);
+  shapes.set(standard, made);
+  return made;
+}
+
+/** The deepest beams no deeper than `mostM`; the shallowest there is where none fits. */
+export function beamsFor(standard: StandardId, mostM: number): readonly BeamShape[] {
+  const all = beamShapes(standard);
+  const fitting = all.filter(({ depthM }) => depthM <= mostM + 1e-6);
+  const depthM = fitting.length > 0 ? fitting[fitting.length - 1]!.depthM : all[0]!.depthM;
+  return all.filter((shape) => Math.abs(shape.depthM - depthM) < 1e-6);
+}

@@ -1,0 +1,204 @@
+import {
+  concrete,
+  girderStiffnessM4,
+  loadStandard,
+  materials,
+  serviceTraffic,
+  trafficEnvelope,
+  trafficOnGirder,
+  type Concrete,
+  type LoadStandard,
+  type TrafficEnvelope,
+  type TrafficLoad,
+} from '../../actions/index.ts';
+import { imposedCurvature, lineBeam, uniform, type Effects, type LineBeam } from '../../mechanics/index.ts';
+import type { StandardId, UnitTask } from '../../model/index.ts';
+import type { SlabDesign } from '../common/slab/designSlab.ts';
+import { supportPositions } from '../common/supports.ts';
+import type { BeamLayout } from './beamLayout.ts';
+import type { BeamShape } from './beamShapes.ts';
+import { compositeBeam, type CompositeBeam } from './compositeBeam.ts';
+import { precastData } from './precastData.ts';
+
+/** What is laid down before the strands are sought: beams across the deck, their shape, the slab on them. */
+export interface BeamChoice {
+  readonly layout: BeamLayout;
+  readonly shape: BeamShape;
+  readonly slab: SlabDesign;
+  /** Fill between beam and slab, m. */
+  readonly haunchM: number;
+}
+
+/** Everything about the beam that carries most, by which all beams are made. */
+export interface PrecastModel extends BeamChoice {
+  readonly task: UnitTask;
+  readonly standardId: StandardId;
+  readonly standard: LoadStandard;
+  readonly supportsM: readonly number[];
+  readonly lengthM: number;
+  readonly beamConcrete: Concrete;
+  readonly releaseConcrete: Concrete;
+  readonly slabConcrete: Concrete;
+  /** Area of one strand, m2, and stress at the jack, MPa. */
+  readonly strandM2: number;
+  readonly jackMPa: number;
+  readonly composite: CompositeBeam;
+  /** One beam, its wet slab and fill, superimposed load, kN/m; one diaphragm within a span, kN a beam. */
+  readonly ownKNm: number;
+  readonly wetKNm: number;
+  readonly superimposedKNm: number;
+  readonly diaphragmKN: number;
+  readonly traffic: TrafficLoad;
+  /** Beam after continuity and what acts on it, characteristic. */
+  readonly beam: LineBeam;
+  readonly superimposed: Effects;
+  readonly most: TrafficEnvelope;
+  /** Parasitic moments of a top warmer by one kelvin. */
+  readonly warmth: Effects;
+  /**
+   * Each span by itself: what sagging is designed for. Creep of the prestress sags a beam made continuous and takes up the
+   * relief that continuity gives (Tadros and others, PCI Journal, on beams made continuous for traffic: many owners design
+   * them so).
+   */
+  readonly simple: readonly SimpleSpan[];
+}
+
+/** Superimposed load and traffic of one span by itself, characteristic and the service share. */
+export interface SimpleSpan {
+  readonly superimposed: Effects;
+  readonly most: TrafficEnvelope;
+  readonly service: TrafficEnvelope;
+}
+
+/** Elements each span is divided into. */
+export const elementsPerSpan = 10;
+
+/** Shares the loads out to the beam that carries most (or to `girder`) and places them. */
+export function precastModel(task: UnitTask, choice: BeamChoice, girder?: number): PrecastModel {
+  const { layout, shape, slab, haunchM } = choice;
+  const id = task.standard;
+  const standard = loadStandard(id);
+  const strengths = materials.concreteDefaultMPa[id];
+  const beamConcrete = concrete(id, strengths.girder);
+  const slabConcrete = concrete(id, strengths.slab);
+  const supportsM = supportPositions(task.spansM);
+  const composite = compositeBeam(task, choice, slabConcrete.ecmMPa / beamConcrete.ecmMPa);
+  const gamma = standard.unitWeights.concreteKNm3;
+  const inner = layout.spacingM * slab.midM;
+  const outer = (layout.spacingM / 2) * slab.midM + (layout.overhangM * (slab.rootM + slab.edgeM)) / 2;
+  const wetM2 = Math.max(inner, outer) + haunchM * shape.topWidthM;
+  const { withinM, heightShare } = precastData.diaphragm;
+  const diaphragmKN = gamma * withinM * heightShare * shape.depthM * (layout.spacingM - shape.webM);
+  const traffic = worstTraffic(task, choice, composite, 1 / composite.slabRatio, girder);
+  const eiKNm2 = beamConcrete.ecmMPa * 1e3 * composite.inertiaM4;
+  const beam = lineBeam({ spansM: task.spansM, stationsPerSpan: elementsPerSpan, eiKNm2: () => eiKNm2 });
+  const superimposedKNm = task.deck.superimposedKNm / layout.count;
+  const most = trafficEnvelope(beam, traffic, { deflection: false });
+  const heightM = shape.depthM + haunchM + slab.rootM;
+  // A warm top is longer and lifts the middle: negative where sagging is positive.
+  const perKelvin = -precastData.temperature.expansion1PerK / heightM;
+  return {
+    ...choice,
+    task,
+    standardId: id,
+    standard,
+    supportsM,
+    lengthM: supportsM[supportsM.length - 1]!,
+    beamConcrete,
+    releaseConcrete: concrete(id, precastData.release.strength[id] * strengths.girder),
+    slabConcrete,
+    strandM2: precastData.strand.areaMm2[id] / 1e6,
+    jackMPa: precastData.strand.jacking[id] * materials.strand[id].ultimateMPa,
+    composite,
+    ownKNm: gamma * shape.areaM2,
+    wetKNm: gamma * wetM2,
+    superimposedKNm,
+    diaphragmKN,
+    traffic,
+    beam,
+    superimposed: uniform(beam, superimposedKNm),
+    most,
+    warmth: imposedCurvature(beam, new Float64Array(beam.xM.length).fill(perKelvin)),
+    simple: simpleSpans(task.spansM, superimposedKNm, traffic, standard),
+  };
+}
+
+/** Every span by itself; equal spans share one. */
+function simpleSpans(
+  spansM: readonly number[],
+  superimposedKNm: number,
+  traffic: TrafficLoad,
+  standard: LoadStandard,
+): SimpleSpan[] {
+  const known = new Map<number, SimpleSpan>();
+  return spansM.map((spanM) => {
+    const made = known.get(spanM);
+    if (made) return made;
+    const beam = lineBeam({ spansM: [spanM], stationsPerSpan: elementsPerSpan });
+    const most = trafficEnvelope(beam, traffic, { deflection: false });
+    const span = {
+      superimposed: uniform(beam, superimposedKNm),
+      most,
+      service: serviceEnvelope(beam, traffic, most, standard),
+    };
+    known.set(spanM, span);
+    return span;
+  });
+}
+
+/** Envelope of the service share; where vehicle and lane load share alike it is the known one scaled. */
+function serviceEnvelope(
+  beam: LineBeam,
+  traffic: TrafficLoad,
+  most: TrafficEnvelope,
+  standard: LoadStandard,
+): TrafficEnvelope {
+  const { vehicle, uniform: lane, footway } = standard.factors.sls;
+  if (vehicle !== lane || (traffic.footwayKNm > 0 && footway !== lane))
+    return trafficEnvelope(beam, serviceTraffic(traffic), { deflection: false });
+  const scaled = (values: Float64Array): Float64Array => values.map((value) => lane * value);
+  return {
+    ...most,
+    momentMaxKNm: scaled(most.momentMaxKNm),
+    momentMinKNm: scaled(most.momentMinKNm),
+    shearMaxKN: scaled(most.shearMaxKN),
+    shearMinKN: scaled(most.shearMinKN),
+  };
+}
+
+/** The beam that carries most; all beams are made like it. */
+function worstTraffic(
+  task: UnitTask,
+  { layout, shape, haunchM }: BeamChoice,
+  composite: CompositeBeam,
+  modularRatio: number,
+  girder?: number,
+): TrafficLoad {
+  const armM = shape.depthM - shape.centroidM + haunchM + composite.slabM / 2;
+  const spanM = Math.max(...task.spansM);
+  const options = {
+    spanM,
+    slabM: composite.slabM,
+    kgM4: girderStiffnessM4(modularRatio, shape.inertiaM4, shape.areaM2, armM),
+  };
+  if (girder !== undefined)
+    return trafficOnGirder(task.standard, task.deck, layout.offsetsM, girder, options);
+  // On a symmetrical deck the outer beam and its neighbour tell all; the middle is never worse.
+  const left = layout.offsetsM.slice(0, 2).map((_, i) => i);
+  const lines = task.deck.carriagewayOffsetM === 0 ? left : [...left, layout.count - 2, layout.count - 1];
+  const loads = [...new Set(lines)].map((i) =>
+    trafficOnGirder(task.standard, task.deck, layout.offsetsM, i, options),
+  );
+  const perVehicle = (2 * heaviestVehicleKN(loadStandard(task.standard))) / spanM;
+  const weigh = (load: TrafficLoad): number =>
+    load.vehicleFactor * perVehicle + load.udlKNm + load.footwayKNm;
+  return loads.reduce((worst, next) => (weigh(next) > weigh(worst) ? next : worst));
+}
+
+/** Weight of the heaviest vehicle of a standard with dynamic allowance, kN. */
+export function heaviestVehicleKN(standard: LoadStandard): number {
+  const weights = standard.vehicles.map((vehicle) =>
+    vehicle.axles.reduce((sum, axle) => sum + axle.loadKN, 0),
+  );
+  return Math.max(...weights) * (1 + standard.dynamicAllowance);
+}

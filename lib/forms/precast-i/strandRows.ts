@@ -1,0 +1,67 @@
+import type { SectionPoint } from '../../mechanics/index.ts';
+import type { StandardId } from '../../model/index.ts';
+import { precastData } from './precastData.ts';
+
+/** One level of the strand grid. */
+export interface StrandRow {
+  readonly zM: number;
+  readonly count: number;
+}
+
+/**
+ * Strands that fit in a beam, row by row from the bottom: a square grid, half a pitch either side of the middle, every
+ * strand at least the axis distance from the outline (`points`, m). Rows above a share of the depth are left out.
+ */
+export function strandRows(
+  points: readonly SectionPoint[],
+  depthM: number,
+  standard: StandardId,
+): readonly StrandRow[] {
+  const { strand } = precastData;
+  const pitch = strand.pitchM[standard];
+  const axis = strand.axisM[standard];
+  const rows: StrandRow[] = [];
+  for (let z = axis; z <= strand.mostHeightShare * depthM + 1e-9; z += pitch) {
+    let count = 0;
+    for (let y = pitch / 2; inside(points, y, z, axis); y += pitch) count += 2;
+    if (count > 0) rows.push({ zM: z, count });
+  }
+  return rows;
+}
+
+/** True for a point inside a symmetrical outline and at least `clear` from it. */
+function inside(points: readonly SectionPoint[], y: number, z: number, clear: number): boolean {
+  let within = false;
+  for (let i = 0; i < points.length; i++) {
+    const [y0, z0] = points[i]!;
+    const [y1, z1] = points[(i + 1) % points.length]!;
+    if (z0 > z !== z1 > z && y < y0 + ((z - z0) / (z1 - z0)) * (y1 - y0)) within = !within;
+    if (distance(y, z, y0, z0, y1, z1) < clear - 1e-9) return false;
+  }
+  return within;
+}
+
+function distance(y: number, z: number, y0: number, z0: number, y1: number, z1: number): number {
+  const length2 = (y1 - y0) ** 2 + (z1 - z0) ** 2;
+  const along = length2 > 0 ? ((y - y0) * (y1 - y0) + (z - z0) * (z1 - z0)) / length2 : 0;
+  const t = Math.min(1, Math.max(0, along));
+  return Math.hypot(y - y0 - t * (y1 - y0), z - z0 - t * (z1 - z0));
+}
+
+/** The lowest `count` strands of a beam: height of their centroid, m. `count` at most all that fit. */
+export function strandCentroidM(rows: readonly StrandRow[], count: number): number {
+  let left = count;
+  let first = 0;
+  for (const row of rows) {
+    const here = Math.min(left, row.count);
+    first += here * row.zM;
+    left -= here;
+    if (left <= 0) break;
+  }
+  return count > 0 ? first / (count - left) : 0;
+}
+
+/** Strands that fit in a beam. */
+export function mostStrands(rows: readonly StrandRow[]): number {
+  return rows.reduce((sum, row) => sum + row.count, 0);
+}
