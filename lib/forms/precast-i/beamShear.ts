@@ -39,6 +39,9 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
   let crowding = 0;
   let linksM2 = 0;
   for (let e = 0; e < elementsPerSpan; e++) {
+    const middle = Math.min(e + 0.5, elementsPerSpan - e - 0.5);
+    const sloped = middle / elementsPerSpan < precastData.relief.endOver[standardId];
+    const carried = sloped ? uls.prestress * 1e3 * force * rise : 0;
     let shearKN = 0;
     for (const i of [e, e + 1]) {
       // At the support itself the shear is read at the structural depth from it.
@@ -51,8 +54,6 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
       const away = Math.abs(x - i * step);
       const own = (model.ownKNm + model.wetKNm) * (spanM / 2 - x) + diaphragmShear(model, spanM, x);
       const side = i === e ? 'shearRightKN' : 'shearLeftKN';
-      const near = Math.min(x, spanM - x) / spanM;
-      const carried = near < precastData.relief.endOver[standardId] ? uls.prestress * 1e3 * force * rise : 0;
       const towards = Math.sign(spanM / 2 - x);
       const alone = model.simple[span]!;
       for (const [effects, envelope, at] of [
@@ -67,7 +68,6 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
       }
     }
     mostKN = Math.max(mostKN, shearKN);
-    const middle = Math.min(e + 0.5, elementsPerSpan - e - 0.5);
     beamMoments(model, span, Math.round(middle), moments);
     strandsAt(model, plan, middle / elementsPerSpan, there);
     const use = webShear({ standardId, standard, concrete: model.beamConcrete }, shape.webM, 0, {
