@@ -26,6 +26,7 @@ import { rankingSection } from './rankingSection.ts';
 import { sectionSection } from './sectionSection.ts';
 import { spanSection } from './spanSection.ts';
 import { studyCells } from './studyCells.ts';
+import { studyWhereFrom } from './whereFrom.ts';
 import { answerWords, nextWords, pricesWords } from './words.ts';
 
 /** What is wrong with a study; nothing when it is valid. Read back from its own text, as a file would be. */
@@ -106,7 +107,7 @@ async function start(): Promise<void> {
   undoKeys(store);
 
   const { head, brief, books } = store.slices;
-  page.mount(document.body, {
+  const element = page.mount(document.body, {
     bar: {
       pages: pagesFrom('option-study'),
       tools: [
@@ -150,6 +151,7 @@ async function start(): Promise<void> {
       rankingSection(page, cells),
     ],
   });
+  studyWhereFrom(graph, cells, element);
   document.title = `${study.title} · Spanledger`;
 
   let timer: ReturnType<typeof setTimeout> | undefined;

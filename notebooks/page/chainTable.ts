@@ -1,7 +1,7 @@
 import type { Figure, FigureKind } from '../../lib/index.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { ChainRow } from './figureChain.ts';
-import { valueWords } from './figureValue.ts';
+import { printedValue, valueWords } from './figureValue.ts';
 
 /** Further in than this the lines stand below one another. */
 const DEEPEST = 8;
@@ -14,11 +14,14 @@ const looks: Readonly<Record<FigureKind, string>> = {
 };
 
 const kinds: Readonly<Record<FigureKind, string>> = {
-  typed: 'typed here',
-  preset: 'preset, to be confirmed',
+  typed: 'typed',
+  preset: 'preset',
   unknown: 'not known',
   computed: '',
 };
+
+/** What kind of figure it is, where its method does not say so itself. */
+const kindOf = ({ kind, because }: Figure): string => (because.method.startsWith(kind) ? '' : kinds[kind]);
 
 const sentence = (words: readonly string[]): string =>
   words.filter((one, i) => one !== '' && words.indexOf(one) === i).join('; ');
@@ -30,13 +33,30 @@ function rangeWords({ path, unit, range }: Figure): string {
   return low === high ? '' : `10 to 90 %: ${low ?? ''} to ${high ?? ''}`;
 }
 
+const reading = (read: boolean): HTMLElement => (read ? h('b', {}, 'read') : h('i', {}, 'from memory'));
+
+/** Trade notation with its own signs: 'a x b - c^2' -> 'a × b − c²'. */
+const notation = (formula: string): string =>
+  formula
+    .replaceAll(' x ', ' × ')
+    .replaceAll(' - ', ' − ')
+    .replace(/\^([23])(?!\d)/gu, (_, power: string) => (power === '2' ? '²' : '³'));
+
+/** How a figure was found, in a word or two, and whether its source was read. */
+function shortly(figure: Figure): HtmlChild {
+  const { because } = figure;
+  const words = sentence([kindOf(figure), because.method]);
+  const [first] = because.sources;
+  return [words, first && '; ', first && reading(because.sources.every(({ read }) => read))];
+}
+
 /** How a figure was found and after what: method and formula, then each source with whether it was read. */
-function because(figure: Figure): HtmlChild {
+function fully(figure: Figure): HtmlChild {
   const { method, formula, sources } = figure.because;
   return [
-    sentence([kinds[figure.kind], method === kinds[figure.kind] ? '' : method, formula, rangeWords(figure)]),
+    sentence([kindOf(figure), method, notation(formula), rangeWords(figure)]),
     sources.map(({ text, read }) =>
-      h('span', { class: 'source' }, text.replace(/\.$/u, ''), '; ', read ? h('b', {}, 'read') : h('i', {}, 'from memory')),
+      h('span', { class: 'source' }, text.replace(/\.$/u, ''), '; ', reading(read)),
     ),
   ];
 }
@@ -49,13 +69,14 @@ function cellsOf(row: ChainRow): readonly [first: HtmlChild, second: HtmlChild] 
   }
   const { figure } = row;
   if (figure === null) return [h('span', { class: 'name' }, row.path), 'not in the latest appraisal'];
+  const { text, unit } = printedValue(figure);
   return [
     [
-      h('span', { class: looks[figure.kind] }, valueWords(figure)),
-      ' ',
+      h('span', { class: looks[figure.kind] }, text),
+      unit === '' ? ' ' : ` ${unit} `,
       h('span', { class: 'name' }, figure.label),
     ],
-    because(figure),
+    row.isOpen ? fully(figure) : shortly(figure),
   ];
 }
 

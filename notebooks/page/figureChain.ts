@@ -62,7 +62,15 @@ export function chainRows(ask: Ask, roots: readonly string[], open: ReadonlySet<
     for (const user of users) put(user, `${head} ${user}`, step + 1);
     const count = figure.usedBy.length - users.length;
     if (count > 0 || users.length === 0)
-      rows.push({ key: rest, step: step + 1, kind: 'more', path: figure.path, figure: null, isOpen: false, count });
+      rows.push({
+        key: rest,
+        step: step + 1,
+        kind: 'more',
+        path: figure.path,
+        figure: null,
+        isOpen: false,
+        count,
+      });
   };
   for (const root of roots) put(root, rootKey(root), 0);
   return rows;

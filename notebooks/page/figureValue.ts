@@ -28,20 +28,32 @@ function number(value: number, unit: string): string {
   return significant(value, unit === 'months' ? 2 : 3);
 }
 
+/** A figure as it is printed and its unit, which stands outside the underline. */
+export interface PrintedValue {
+  readonly text: string;
+  readonly unit: string;
+}
+
 /**
- * A figure of the study as it is printed, with its unit: no finer than its accuracy, costs to two significant figures,
- * odds in steps of 5 %.
+ * A figure of the study as it is printed: no finer than its accuracy, costs to two significant figures, odds in steps
+ * of 5 %.
  */
-export function valueWords({ path, value, unit }: Valued): string {
-  if (value === null || value === 'unknown') return 'unknown';
-  if (typeof value === 'boolean') return value ? 'yes' : 'no';
-  if (typeof value === 'string') return value;
-  if (/^standing\/(?:odds|within)\//u.test(path)) return `${odds(value)} %`;
+export function printedValue({ path, value, unit }: Valued): PrintedValue {
+  if (value === null || value === 'unknown') return { text: 'unknown', unit: '' };
+  if (typeof value === 'boolean') return { text: value ? 'yes' : 'no', unit: '' };
+  if (typeof value === 'string') return { text: value, unit: '' };
+  if (/^standing\/(?:odds|within)\//u.test(path)) return { text: odds(value), unit: '%' };
   if (/^[A-Z]{3}$/u.test(unit)) {
-    if (Math.abs(value) < 1000) return `${money2(value)} ${currencySign(unit)}`;
-    const scale = moneyUnit(unit, Math.abs(value));
-    return `${money2(value / scale.per)} ${scale.label}`;
+    const size = Math.abs(value);
+    const scale = size < 1000 ? { per: 1, label: currencySign(unit) } : moneyUnit(unit, size);
+    return { text: money2(value / scale.per), unit: scale.label };
   }
   const text = path.includes('/pricePerM2/') ? money2(value) : number(value, unit);
-  return `${text} ${unitWords(unit)}`.trimEnd();
+  return { text, unit: unitWords(unit) };
+}
+
+/** The same in one run: '6.3 M€'. */
+export function valueWords(figure: Valued): string {
+  const { text, unit } = printedValue(figure);
+  return unit === '' ? text : `${text} ${unit}`;
 }

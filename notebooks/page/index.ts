@@ -20,6 +20,8 @@ export { wordsInput, type WordsInput, type WordsSpec } from './wordsInput.ts';
 export { standing, type StandingSpec } from './standing.ts';
 export { pushed } from './pushed.ts';
 export { draggable, type Drag, type DragAt } from './dragging.ts';
+export { whereFrom, type Ask, type WhereFrom } from './whereFrom.ts';
+export { workedFigure } from './workedFigure.ts';
 export { undoKeys, type Undoable } from './undoKeys.ts';
 export { waysOn, type Way } from './refusal.ts';
 export { getAt, isWithin, putAt, type Path } from './place.ts';

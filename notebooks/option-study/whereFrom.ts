@@ -1,0 +1,52 @@
+import { figure, type FigureContext } from '../../lib/index.ts';
+import { whereFrom, type Ask, type WhereFrom } from '../page/index.ts';
+import type { Graph } from '../reactive/index.ts';
+import type { StudyCells } from './studyCells.ts';
+
+/** Where figures are shown, by the beginning of their path; the first that fits. */
+const stations: readonly (readonly [path: RegExp, station: string])[] = [
+  [/^brief\/(?:obstacles|waters|crossing\/ground)\b/u, '1+030'],
+  [/^brief\/(?:deck|groundStretches|surfacingM)\b/u, '1+040'],
+  [/^brief\//u, '1+010'],
+  [/^site\//u, '1+020'],
+  [/^droppedCounts\//u, '3+020'],
+  [/^(?:rates|books)\//u, '7+005'],
+  [/^standing\/within\//u, '7+020'],
+  [/^standing\/(?:odds|groups)\//u, '7+030'],
+  [/^standing\/leader$/u, '10+010'],
+  [/^options\/\d+\/(?:units|supports)\//u, '3+020'],
+  [/^options\/\d+\/(?:profile|headroom|depthM|over)\//u, '4+010'],
+  [/^options\/\d+\/designs\/\d+\/(?:checks|depthM|limitingCheck|task)\//u, '5+010'],
+  [/^options\/\d+\/perM2\//u, '6+010'],
+  [/^options\/\d+\/parts\//u, '7+010'],
+  [/^options\/\d+\/(?:cost|quartiles|pricePerM2)\//u, '7+020'],
+  [/^options\/\d+\/(?:months|programme)\//u, '8+010'],
+  [/^options\/\d+\/rulings\//u, '10+020'],
+  [/^options\/\d+\/(?:status|limitingCheck)\b/u, '10+010'],
+];
+
+/** The station where a figure, or the table it belongs to, is shown; undefined for figures on the way that none shows. */
+export const stationOf = (path: string): string | undefined =>
+  stations.find(([pattern]) => pattern.test(path))?.[1];
+
+/** Lets every figure of the page be asked where it comes from; a study and its appraisal always answer for one age. */
+export function studyWhereFrom(graph: Graph, cells: StudyCells, sheet: HTMLElement): WhereFrom {
+  const where = whereFrom(sheet, stationOf);
+  let age: FigureContext | undefined;
+  let ask: Ask | null = null;
+  const stop = graph.view({ study: cells.asked, appraisal: cells.appraisal }, (state) => {
+    if ('value' in state && state.value !== age) {
+      const context = state.value;
+      age = context;
+      ask = (path) => figure(context, path);
+    }
+    where.set(ask, state.state === 'pending');
+  });
+  return {
+    set: where.set,
+    end() {
+      stop();
+      where.end();
+    },
+  };
+}
