@@ -1,9 +1,10 @@
 import type { DeckSpec, FormId, MethodId } from '../model/index.ts';
-import { depthBand, floorBand } from '../rules/index.ts';
+import { depthBand, floorBand, midspanDepthBand, windowOf } from '../rules/index.ts';
 
 /**
  * Band of structural depth under the road, m, that the rules give a form for its governing span.
- * A form that carries the road between two main members has its floor measured by the deck width.
+ * A form that carries the road between two main members has its floor measured by the deck width; of one whose depth
+ * varies it is the depth at midspan.
  */
 export function depthRange(
   form: FormId,
@@ -14,6 +15,7 @@ export function depthRange(
   const floor = floorBand(form);
   if (floor) return [floor[0] * deck.widthM, floor[1] * deck.widthM];
   const governing = Math.max(...spansM);
-  const band = depthBand(form, spansM.length > 1 ? 'continuous' : 'simple', method);
-  return [band[0] * governing, band[1] * governing];
+  const band = midspanDepthBand(form) ?? depthBand(form, spansM.length > 1 ? 'continuous' : 'simple', method);
+  const least = Math.max(band[0] * governing, windowOf(form, 'midspanDepthM', ['to confirm'])?.[0] ?? 0);
+  return [least, Math.max(least, band[1] * governing)];
 }

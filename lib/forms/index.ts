@@ -1,10 +1,11 @@
 import type { FormId } from '../model/index.ts';
 import { cableStayed } from './cable-stayed/index.ts';
+import { cantileverBox } from './cantilever-box/index.ts';
 import { compositeI } from './composite-i/index.ts';
 import { concreteBox } from './concrete-box/index.ts';
 import type { FormModule } from './formModule.ts';
-import { precastI } from './precast-i/index.ts';
 import { slab } from './slab/index.ts';
+import { precastI } from './precast-i/index.ts';
 import { truss } from './truss/index.ts';
 
 export type { FormModule, Pattern } from './formModule.ts';
@@ -15,6 +16,7 @@ export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   'precast-i': precastI,
   'composite-i': compositeI,
   'concrete-box': concreteBox,
+  'cantilever-box': cantileverBox,
   truss,
   'cable-stayed': cableStayed,
 };

@@ -48,7 +48,14 @@ export const familyOf: Readonly<Record<FormId, Family>> = {
 };
 
 /** Methods of construction. */
-export const methodIds = ['crane', 'falsework', 'launch', 'float-in', 'stay-cantilever'] as const;
+export const methodIds = [
+  'crane',
+  'falsework',
+  'launch',
+  'float-in',
+  'balanced-cantilever',
+  'stay-cantilever',
+] as const;
 export type MethodId = (typeof methodIds)[number];
 
 /** Traffic load standards. Each is a data file in `data/standards`. */

@@ -1,7 +1,14 @@
 import { described, type At, type Descriptor, type FormId, type MethodId } from '../model/index.ts';
 import { rulesFor } from './book.ts';
 import type { Subject } from './rule.ts';
-import { depthBand, endRatioWindow, floorBand, spanWindow, type Interval } from './windows.ts';
+import {
+  depthBand,
+  endRatioWindow,
+  floorBand,
+  midspanDepthBand,
+  spanWindow,
+  type Interval,
+} from './windows.ts';
 
 const form = (at: At): FormId => at.name('form') as FormId;
 
@@ -63,6 +70,14 @@ export const windowFigures: readonly Descriptor[] = [
       depthBand(form(at), at.name('continuity') as 'simple' | 'continuous', at.name('method') as MethodId),
   ),
   ...window(
+    'midspan',
+    'midspan depth over span',
+    '',
+    'band that published guidance favours',
+    'depth',
+    (at) => midspanDepthBand(form(at)) ?? any,
+  ),
+  ...window(
     'floor',
     'floor depth over deck width',
     '',
@@ -80,6 +95,7 @@ export function depthWindow(
 ): { readonly paths: readonly string[]; readonly by: 'span' | 'deck width' } {
   const ends = ['least', 'most'] as const;
   if (floorBand(of)) return { paths: ends.map((end) => `windows/${of}/floor/${end}`), by: 'deck width' };
+  if (midspanDepthBand(of)) return { paths: ends.map((end) => `windows/${of}/midspan/${end}`), by: 'span' };
   const continuity = spans > 1 ? 'continuous' : 'simple';
   return { paths: ends.map((end) => `windows/${of}/depth/${continuity}/${method}/${end}`), by: 'span' };
 }

@@ -18,6 +18,9 @@ export interface CompressedFace {
   readonly websM: number;
 }
 
+/** What the strength of a section hangs on besides its steel and its face. */
+export type Strengths = Pick<BoxModel, 'concrete' | 'standardId' | 'standard'>;
+
 /** Share of the effective depth that the stress block may fill while the steel still yields. */
 const deepestBlock = 0.36;
 
@@ -25,7 +28,7 @@ const deepestBlock = 0.36;
  * Design moment of resistance, kNm: strands and bars at their design strength against a rectangular stress block in the
  * flange and, past it, in the webs. More steel than the block can balance counts for nothing.
  */
-export function bendingCapacity(model: BoxModel, steel: TensionSteel, face: CompressedFace): number {
+export function bendingCapacity(model: Strengths, steel: TensionSteel, face: CompressedFace): number {
   const fcd = model.concrete.fcdMPa * 1e3;
   const prestressed = steel.strandM2 * strandDesignMPa(model) * 1e3;
   const barred = steel.barM2 * barDesignMPa(model.standardId) * 1e3;
@@ -40,7 +43,11 @@ export function bendingCapacity(model: BoxModel, steel: TensionSteel, face: Comp
 }
 
 /** Depth of the middle of the stress block under a compression, m; see `bendingCapacity`. */
-export function compressionDepth(model: BoxModel, face: CompressedFace, forceKN: number): number {
+export function compressionDepth(
+  model: Pick<Strengths, 'concrete'>,
+  face: CompressedFace,
+  forceKN: number,
+): number {
   const fcd = model.concrete.fcdMPa * 1e3;
   const flangeKN = fcd * face.widthM * face.flangeM;
   if (!(forceKN > flangeKN)) return forceKN / (fcd * face.widthM) / 2;
@@ -50,13 +57,18 @@ export function compressionDepth(model: BoxModel, face: CompressedFace, forceKN:
 }
 
 /** Depth of the stress block, m, that balances a design moment on a face of given width; the effective depth where none does. */
-export function blockDepth(model: BoxModel, momentKNm: number, effectiveM: number, widthM: number): number {
+export function blockDepth(
+  model: Pick<Strengths, 'concrete'>,
+  momentKNm: number,
+  effectiveM: number,
+  widthM: number,
+): number {
   const rest = effectiveM ** 2 - (2 * momentKNm) / (model.concrete.fcdMPa * 1e3 * widthM);
   return rest > 0 ? effectiveM - Math.sqrt(rest) : effectiveM;
 }
 
 /** Design strength of strand at the ultimate limit, MPa: proof stress over its divisor (EN); near its strength (AASHTO). */
-export function strandDesignMPa(model: BoxModel): number {
+export function strandDesignMPa(model: Pick<Strengths, 'standardId' | 'standard'>): number {
   const { proofMPa } = materials.strand[model.standardId];
   return proofMPa / model.standard.resistance.prestress;
 }

@@ -32,14 +32,13 @@ export function boxBars(model: BoxModel, box: SizedBox): BoxBars {
     stirrupsKg += webs * barKg(stirrupsM2PerM, stirrupM) * (beam.xM[e + 1]! - beam.xM[e]!);
   });
   const bottomM = box.sections.span.bottomWidthM;
-  const { tieShare, stressMPa, lengthM: linkM } = boxData.bursting;
   const anchorages = anchorageCount(model, box);
   const anchorKN =
     (box.tendons.strandsPerWeb / box.tendons.group.tendonsPerWeb) *
     model.strandM2 *
     box.tendons.stress.jackMPa *
     1e3;
-  const burstingKg = anchorages * barKg((tieShare * anchorKN) / (stressMPa * 1e3), linkM);
+  const burstingKg = anchorages * burstingBarsKg(anchorKN);
   const diaphragmM3 = box.own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
   const parts = {
     topAcrossKg: slab.mainBarsKgM2 * areaM2,
@@ -56,6 +55,12 @@ export function boxBars(model: BoxModel, box: SizedBox): BoxBars {
     blisterKg: boxData.blisters.barsKgM3 * box.own.blistersM3 + burstingKg,
   };
   return { ...parts, totalKg: Object.values(parts).reduce((sum, kg) => sum + kg, 0) };
+}
+
+/** Bars behind one anchorage of a force, kg. */
+export function burstingBarsKg(anchorKN: number): number {
+  const { tieShare, stressMPa, lengthM } = boxData.bursting;
+  return barKg((tieShare * anchorKN) / (stressMPa * 1e3), lengthM);
 }
 
 /** Anchorages of the draped tendons: two for every length of tendon, two spans long or the whole deck. */

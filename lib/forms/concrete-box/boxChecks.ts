@@ -2,9 +2,11 @@ import { trafficOnInfluence, type TrafficLoad } from '../../actions/index.ts';
 import { beamTrack, deflectionInfluence } from '../../mechanics/index.ts';
 import type { Check } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
+import { middleStation } from '../common/middleStation.ts';
 import { boxData } from './boxData.ts';
 import { boxService } from './boxService.ts';
 import type { BoxModel } from './boxModel.ts';
+import type { BoxTraffic } from './boxTraffic.ts';
 import type { StressUse } from './boxStress.ts';
 import { mostStrandsPerWeb } from './findTendons.ts';
 import type { BendingUse } from './ultimateBending.ts';
@@ -66,7 +68,7 @@ export function boxChecks(model: BoxModel, box: SizedBox): Check[] {
       Math.max(0, box.sections.pier.outline.innerM),
       'm',
     ),
-    deflection(model, box),
+    trafficDeflection(model, model.concrete.ecmMPa * 1e3 * box.sections.span.inertiaM4),
   ];
   if (box.launch) {
     const { compressionMPa } = box.launch;
@@ -92,11 +94,13 @@ function stress(id: string, label: string, { stressMPa, limitMPa }: StressUse): 
   return check(id, label, stressMPa, limitMPa, 'MPa');
 }
 
-/** Traffic deflection at the middles of the spans over the limit; the worst span. */
-function deflection(model: BoxModel, box: SizedBox): Check {
+/** A box on its beam with its traffic. */
+type OnBeam = Pick<BoxModel, 'beam' | 'task' | 'standardId'> & { readonly traffic: Pick<BoxTraffic, 'load'> };
+
+/** Traffic deflection at the middles of the spans over the limit; the worst span. `ei` is the stiffness of a beam of 1, kNm2. */
+export function trafficDeflection(model: OnBeam, ei: number): Check {
   const { spansM } = model.task;
   const limit = boxData.deflectionRatio.value;
-  const ei = model.concrete.ecmMPa * 1e3 * box.sections.span.inertiaM4;
   const checks = spansM.map((spanM, span) =>
     check('deflection', 'deflection under traffic', midspanDeflection(model, span) / ei, spanM / limit, 'm'),
   );
@@ -104,16 +108,15 @@ function deflection(model: BoxModel, box: SizedBox): Check {
 }
 
 /** Deflection of the middle of a span on stiffness 1, m x kNm2. */
-function midspanDeflection(model: BoxModel, span: number): number {
+function midspanDeflection(model: OnBeam, span: number): number {
   const { beam } = model;
-  const station = (beam.supportAt[span]! + beam.supportAt[span + 1]!) >> 1;
-  const line = deflectionInfluence(beam, station);
+  const line = deflectionInfluence(beam, middleStation(beam, span));
   const track = beamTrack(beam);
   return Math.max(...deflectionLoads(model).map((load) => trafficOnInfluence(load, track, line).max));
 }
 
 /** Characteristic traffic; under AASHTO LRFD 3.6.1.3.2 (from memory) the vehicle, or a quarter of it with the lane load. */
-function deflectionLoads(model: BoxModel): TrafficLoad[] {
+function deflectionLoads(model: OnBeam): TrafficLoad[] {
   const { load } = model.traffic;
   if (model.standardId === 'lm1') return [load];
   return [

@@ -1,4 +1,4 @@
-import type { SectionCut, Shape } from '../../model/index.ts';
+import type { DeckSpec, SectionCut, Shape } from '../../model/index.ts';
 import { constantDepth } from '../common/depthAlong.ts';
 import { deckFace, soffitLine, upright } from '../common/elevation.ts';
 import { deckFurniture } from '../common/furniture.ts';
@@ -49,15 +49,18 @@ function tendonLine(model: BoxModel, box: SizedBox): Shape {
 export function boxSections(model: BoxModel, box: SizedBox): SectionCut[] {
   const { spansM } = model.task;
   const longest = spansM.indexOf(Math.max(...spansM));
-  const cuts = [cut(model, 'midspan', model.supportsM[longest]! + spansM[longest]! / 2, box.sections.span)];
+  const cuts = [
+    cutOf(model.task.deck, 'midspan', model.supportsM[longest]! + spansM[longest]! / 2, box.sections.span),
+  ];
   if (spansM.length > 1) {
     const pier = longest > 0 ? longest : 1;
-    cuts.push(cut(model, 'pier', model.supportsM[pier]!, box.sections.pier));
+    cuts.push(cutOf(model.task.deck, 'pier', model.supportsM[pier]!, box.sections.pier));
   }
   return cuts;
 }
 
-function cut(model: BoxModel, at: string, xM: number, { outline }: BoxSection): SectionCut {
+/** A section of a box with what stands on its deck. */
+export function cutOf(deck: DeckSpec, at: string, xM: number, { outline }: BoxSection): SectionCut {
   return {
     at,
     xM,
@@ -69,7 +72,7 @@ function cut(model: BoxModel, at: string, xM: number, { outline }: BoxSection): 
         points: outline.outer,
         ...(outline.cells.length > 0 ? { holes: outline.cells } : {}),
       },
-      ...deckFurniture(model.task.deck),
+      ...deckFurniture(deck),
     ],
   };
 }

@@ -25,14 +25,12 @@ export function boxLayout(task: UnitTask): BoxLayout {
   const cells = Math.max(1, Math.ceil(deck.widthM / mostWebSpacingM - 2 * overhangOverSpacing - 1e-9));
   const spacingM = deck.widthM / (cells + 2 * overhangOverSpacing);
   const overhangM = overhangOverSpacing * spacingM;
-  const { most, bottomOverTop } = boxData.webSlope;
-  const topM = cells * spacingM;
   return {
     cells,
     webs: cells + 1,
     spacingM,
     overhangM,
-    slope: Math.min(most, ((1 - bottomOverTop) * topM) / (2 * task.depthM)),
+    slope: webSlope(cells * spacingM, task.depthM),
     slab: designSlab({
       standard: task.standard,
       deck,
@@ -43,4 +41,10 @@ export function boxLayout(task: UnitTask): BoxLayout {
       uniform: false,
     }),
   };
+}
+
+/** Horizontal over vertical of the outer webs of a box of given width between their axes at the top and depth, m. */
+export function webSlope(topM: number, depthM: number): number {
+  const { most, bottomOverTop } = boxData.webSlope;
+  return Math.min(most, ((1 - bottomOverTop) * topM) / (2 * depthM));
 }

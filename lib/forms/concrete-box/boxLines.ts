@@ -61,7 +61,8 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
     measured(
       'deck',
       'box-formwork',
-      formworkPerM(sections.span.outline) * lengthM + diaphragmForms(model, box),
+      formworkPerM(sections.span.outline) * lengthM +
+        diaphragmForms(own.diaphragmM3, (j) => j > 0 && j < model.supportsM.length - 1),
       'forms of the box',
       'outside without the top of the deck, cells without their floor, both faces of diaphragms',
     ),
@@ -71,7 +72,7 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
 }
 
 /** Strand along the deck, kg. */
-export function strandKg(model: BoxModel, strands: number): number {
+export function strandKg(model: Pick<BoxModel, 'strandM2' | 'lengthM'>, strands: number): number {
   return strands * model.strandM2 * materials.steelDensityKgM3 * model.lengthM * boxData.strandSlack.value;
 }
 
@@ -90,7 +91,7 @@ function falsework(model: BoxModel): MeasuredLine {
 }
 
 /** Formed faces per m of deck: all but level faces that look up (top of the deck, floors of the cells). */
-function formworkPerM({ outer, cells }: Outline): number {
+export function formworkPerM({ outer, cells }: Outline): number {
   const formed = (points: readonly (readonly [number, number])[], looksUp: number): number => {
     let sum = 0;
     points.forEach(([y, z], i) => {
@@ -106,10 +107,12 @@ function formworkPerM({ outer, cells }: Outline): number {
 }
 
 /** Both faces of the diaphragms, m2. */
-function diaphragmForms(model: BoxModel, box: SizedBox): number {
-  const last = model.supportsM.length - 1;
+export function diaphragmForms(
+  diaphragmM3: readonly number[],
+  isInner: (support: number) => boolean,
+): number {
   const { pierM, endM } = boxData.diaphragm;
-  return box.own.diaphragmM3.reduce((sum, m3, j) => sum + (2 * m3) / (j > 0 && j < last ? pierM : endM), 0);
+  return diaphragmM3.reduce((sum, m3, j) => sum + (2 * m3) / (isInner(j) ? pierM : endM), 0);
 }
 
 function mm(lengthM: number): string {

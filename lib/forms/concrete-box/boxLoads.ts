@@ -1,6 +1,7 @@
 import { distributed, type Effects } from '../../mechanics/index.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
+import type { BoxSection } from './boxSection.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 
 /** Own weight of the box. */
@@ -33,11 +34,14 @@ export function ownWeight(model: BoxModel, sections: SectionsAlong): OwnWeight {
   };
 }
 
-/** Concrete that fills the cells over a support, less an opening in each cell. */
 function diaphragm(model: BoxModel, sections: SectionsAlong, support: number): number {
-  const { pierM, endM, openingM2 } = boxData.diaphragm;
   const inner = support > 0 && support < model.supportsM.length - 1;
-  const { outline, areaM2 } = inner ? sections.pier : sections.span;
+  return diaphragmM3(inner ? sections.pier : sections.span, inner);
+}
+
+/** Concrete that fills the cells of a section over a support, less an opening in each cell, m3. */
+export function diaphragmM3({ outline, areaM2 }: BoxSection, inner: boolean): number {
+  const { pierM, endM, openingM2 } = boxData.diaphragm;
   const solid = outline.cells.length === 0 ? 0 : outlineArea(outline.outer) - areaM2;
   const thicknessM = inner ? pierM : endM;
   const open = Math.min(solid * 0.3, openingM2 * outline.cells.length);

@@ -3,7 +3,9 @@ import { polygonProperties } from '../../mechanics/index.ts';
 import { faceBarsM2 } from './bendingCapacity.ts';
 import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
+import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
+import type { BoxTraffic } from './boxTraffic.ts';
 import type { Tendons } from './findTendons.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { ultimateMoments } from './ultimateMoments.ts';
@@ -33,12 +35,12 @@ export function boxShear(
   const { uls } = model.standard.factors;
   const { layout, beam, superimposed, task } = model;
   const { most } = model.traffic;
-  const { enclosedM2, wallM } = tube(model, sections);
+  const { enclosedM2, wallM } = tube(layout, task.depthM, sections.span.bottomM);
   const perM = wallM / (2 * enclosedM2);
   const webShare = trafficShare(model, perM);
-  const torque = curveTorque(model, own);
+  const torque = curveTorque(model, own.effects.momentKNm);
   const lean = Math.hypot(1, layout.slope);
-  const across = webBending(model, sections);
+  const across = webBending(layout, task.depthM, sections.span.webM);
   const { down, up } = ultimateMoments(model, own);
   const momentAt = (i: number): number => Math.max(Math.abs(down[i]!), Math.abs(up[i]!));
   const demands: WebDemand[] = [];
@@ -86,10 +88,12 @@ export function boxShear(
 }
 
 /** Area within the middle lines of the outer walls and the height of an outer wall along its slope. */
-function tube(model: BoxModel, sections: SectionsAlong): { enclosedM2: number; wallM: number } {
-  const { layout, task } = model;
-  const { span } = sections;
-  const heightM = Math.max(0.1, task.depthM - layout.slab.midM / 2 - span.bottomM / 2);
+export function tube(
+  layout: BoxLayout,
+  depthM: number,
+  bottomM: number,
+): { enclosedM2: number; wallM: number } {
+  const heightM = Math.max(0.1, depthM - layout.slab.midM / 2 - bottomM / 2);
   const topM = layout.cells * layout.spacingM;
   const points = [
     [-topM / 2, 0],
@@ -101,7 +105,10 @@ function tube(model: BoxModel, sections: SectionsAlong): { enclosedM2: number; w
 }
 
 /** Traffic of the outer web against that of the deck, vehicles counted as 2P/L. */
-function trafficShare(model: BoxModel, flowPerM: number): number {
+export function trafficShare(
+  model: Pick<BoxModel, 'task' | 'layout' | 'standard'> & { readonly traffic: Pick<BoxTraffic, 'load'> },
+  flowPerM: number,
+): number {
   const { task, layout, standard } = model;
   const edge = task.deck.widthM / 2;
   const even = 1 / layout.webs;
@@ -130,14 +137,16 @@ function trafficShare(model: BoxModel, flowPerM: number): number {
 }
 
 /** Torque of a curved deck from M / R along each span held against turning at its supports, kNm at the stations. */
-function curveTorque(model: BoxModel, own: OwnWeight): Float64Array {
+export function curveTorque(
+  model: Pick<BoxModel, 'beam' | 'task' | 'superimposed'> & { readonly traffic: Pick<BoxTraffic, 'most'> },
+  ownKNm: Float64Array,
+): Float64Array {
   const { beam, task, traffic } = model;
   const n = beam.xM.length;
   const torque = new Float64Array(n);
   if (!(task.planRadiusM < Infinity)) return torque;
   const perM = (i: number): number =>
-    (own.effects.momentKNm[i]! + model.superimposed.momentKNm[i]! + traffic.most.momentMaxKNm[i]!) /
-    task.planRadiusM;
+    (ownKNm[i]! + model.superimposed.momentKNm[i]! + traffic.most.momentMaxKNm[i]!) / task.planRadiusM;
   task.spansM.forEach((spanM, span) => {
     const from = beam.supportAt[span]!;
     const to = beam.supportAt[span + 1]!;
@@ -159,9 +168,8 @@ function curveTorque(model: BoxModel, own: OwnWeight): Float64Array {
 }
 
 /** Bending of a web across the deck: half of the root moment of the slab, shared by the stiffness of web and slab. */
-function webBending(model: BoxModel, sections: SectionsAlong): number {
-  const { slab, spacingM } = model.layout;
-  const web = (4 * sections.span.webM ** 3) / Math.max(0.3, model.task.depthM);
+export function webBending({ slab, spacingM }: BoxLayout, depthM: number, webM: number): number {
+  const web = (4 * webM ** 3) / Math.max(0.3, depthM);
   const deck = (2 * slab.midM ** 3) / spacingM;
   return (0.5 * slab.rootMomentKNm * web) / (web + deck);
 }

@@ -28,12 +28,16 @@ export function boxTraffic(task: UnitTask, beam: LineBeam): BoxTraffic {
   const key = JSON.stringify([task.standard, task.spansM, task.deck]);
   const known = kept.get(key);
   if (known) return known;
-  const load = trafficOnDeck(task.standard, task.deck);
-  const most = trafficEnvelope(beam, load, { deflection: false });
-  const made = { load, most, service: serviceMoments(beam, load, most) };
+  const made = trafficOnBox(beam, trafficOnDeck(task.standard, task.deck));
   if (kept.size >= 32) for (const [oldest] of [...kept].slice(0, 16)) kept.delete(oldest);
   kept.set(key, made);
   return made;
+}
+
+/** Envelopes of a load on a beam, characteristic and in the combination that decides the prestress. */
+export function trafficOnBox(beam: LineBeam, load: TrafficLoad): BoxTraffic {
+  const most = trafficEnvelope(beam, load, { deflection: false });
+  return { load, most, service: serviceMoments(beam, load, most) };
 }
 
 /** Where all loads are taken at the same share, as in Service III, the characteristic moments are scaled. */

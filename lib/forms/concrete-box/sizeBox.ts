@@ -118,7 +118,8 @@ function grow(model: BoxModel, box: SizedBox, settled: boolean): Thicknesses {
   return same ? t : { webM, supportWebM, bottomM, pierBottomM };
 }
 
-function thicker(nowM: number, use: number): number {
+/** Thickness to try next where a stress is past its limit, m. */
+export function thicker(nowM: number, use: number): number {
   return nowM * Math.min(1.6, 1 + 1.2 * (use - 1)) + 1e-3;
 }
 

@@ -1,7 +1,7 @@
 import { materials } from '../../actions/index.ts';
 import { barDesignMPa } from '../common/bars.ts';
 import { boxData } from './boxData.ts';
-import type { BoxModel } from './boxModel.ts';
+import type { Strengths } from './bendingCapacity.ts';
 
 /** Shear of one web at one place, design values. */
 export interface WebDemand {
@@ -34,7 +34,7 @@ export interface WebUse {
  * Variable struts (EN 1992-1-1 6.2.3) or the sectional model (AASHTO LRFD 5.7.3), both from memory. Stirrups carry the
  * bending across the web too: half of one with the whole of the other, whichever is more.
  */
-export function webShear(model: BoxModel, webM: number, ductM: number, demand: WebDemand): WebUse {
+export function webShear(model: Strengths, webM: number, ductM: number, demand: WebDemand): WebUse {
   const clear = webM - (ductM > webM / 8 ? boxData.shear.ductShare[model.standardId] : 0) * ductM;
   const lever = boxData.shear.leverRatio * demand.effectiveM;
   const fy = barDesignMPa(model.standardId) * 1e3;
@@ -60,7 +60,7 @@ interface ShearNeed {
 
 /** EN: struts as flat as their strength allows, cot between 1 and 2.5. */
 function variableStruts(
-  model: BoxModel,
+  model: Strengths,
   clear: number,
   webM: number,
   lever: number,
@@ -86,7 +86,7 @@ function variableStruts(
 
 /** AASHTO: concrete and stirrups together, angle and share of the concrete by the strain of the tension chord. */
 function sectional(
-  model: BoxModel,
+  model: Strengths,
   clear: number,
   webM: number,
   lever: number,
@@ -113,7 +113,7 @@ function sectional(
 /**
  * Web thickness, m, at which the struts stand at the angle webs are sized for and the stirrups fit.
  */
-export function webNeeded(model: BoxModel, webM: number, ductM: number, demand: WebDemand): number {
+export function webNeeded(model: Strengths, webM: number, ductM: number, demand: WebDemand): number {
   const { crushing, crowding } = webShear(model, webM, ductM, demand);
   const cot = boxData.shear.designCot;
   const strutUse = model.standardId === 'lm1' ? (crushing * (cot + 1 / cot)) / 2 : crushing;

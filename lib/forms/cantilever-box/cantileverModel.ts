@@ -1,0 +1,138 @@
+import { concrete, loadStandard, materials, type Concrete, type LoadStandard } from '../../actions/index.ts';
+import { imposedCurvature, uniform, type Effects, type LineBeam } from '../../mechanics/index.ts';
+import type { StandardId, UnitTask } from '../../model/index.ts';
+import { supportPositions } from '../common/supports.ts';
+import { boxData } from '../concrete-box/boxData.ts';
+import { boxLayout, webSlope, type BoxLayout } from '../concrete-box/boxLayout.ts';
+import { roundUp } from '../concrete-box/boxModel.ts';
+import type { BoxTraffic } from '../concrete-box/boxTraffic.ts';
+import { armsOf, type Arm } from './arms.ts';
+import { cantileverData } from './cantileverData.ts';
+import { haunchShare, pierDepths, placeAt } from './haunch.ts';
+import type { OverSupports } from './parasitic.ts';
+import { stiffDeck } from './stiffDeck.ts';
+
+/** What does not hang on the depth over the piers. */
+export interface CantileverBase {
+  readonly task: UnitTask;
+  readonly standardId: StandardId;
+  readonly standard: LoadStandard;
+  readonly concrete: Concrete;
+  /** Box of the depth at midspan. */
+  readonly layout: BoxLayout;
+  readonly supportsM: readonly number[];
+  readonly lengthM: number;
+  readonly arms: readonly Arm[];
+  /** Span that governs: twice the longest haunch, or the longest span, m. */
+  readonly governingM: number;
+  /** Area of one strand, m2. */
+  readonly strandM2: number;
+  readonly leastWebM: number;
+  readonly leastBottomM: number;
+}
+
+/** A haunched deck before its thicknesses and tendons are sought. */
+export interface CantileverModel extends CantileverBase {
+  /** Depth over the piers of the longest arms, m. */
+  readonly pierDepthM: number;
+  /** The same by support. */
+  readonly depthsM: ReadonlyMap<number, number>;
+  /** Stiffness 1 at midspan; inertia over that at midspan at the stations. */
+  readonly beam: LineBeam;
+  readonly inertia: Float64Array;
+  /** Arm of each station (-1 in a single span), way from its pier to the end of the haunch, depth there, m. */
+  readonly armAt: Int16Array;
+  readonly way: Float64Array;
+  readonly depthM: Float64Array;
+  readonly overSupports: OverSupports;
+  /** Stations of each inner pier from the tips of its arms inwards, with their distance from it, m. */
+  readonly towardsPiers: ReadonlyMap<number, readonly { readonly i: number; readonly away: number }[]>;
+  readonly superimposed: Effects;
+  readonly traffic: BoxTraffic;
+  /** Parasitic moment of 1 / depth as curvature that sags the deck, on stiffness 1, kNm per kNm2. */
+  readonly warmKNm: Float64Array;
+  readonly mostBottomM: number;
+}
+
+/** Lays out the box and the arms. */
+export function cantileverBase(task: UnitTask): CantileverBase {
+  const { spansM, standard: standardId } = task;
+  const layout = boxLayout(task);
+  const supportsM = supportPositions(spansM);
+  const arms = armsOf(spansM);
+  const clearM = layout.spacingM - boxData.webLeastM[standardId];
+  const { leastM, clearOverThickness } = boxData.bottomSlab;
+  return {
+    task,
+    standardId,
+    standard: loadStandard(standardId),
+    concrete: concrete(standardId, materials.concreteDefaultMPa[standardId].box),
+    layout,
+    supportsM,
+    lengthM: supportsM[supportsM.length - 1]!,
+    arms,
+    governingM: arms.length > 0 ? 2 * Math.max(...arms.map(({ haunchM }) => haunchM)) : Math.max(...spansM),
+    strandM2: boxData.strandAreaMm2[standardId] * 1e-6,
+    leastWebM: boxData.webLeastM[standardId],
+    leastBottomM: roundUp(Math.max(leastM, clearM / clearOverThickness)),
+  };
+}
+
+/**
+ * A depth over the piers with its beam, traffic and superimposed load.
+ * @param power of the depth by which the inertia grows towards the piers
+ */
+export function cantileverModel(base: CantileverBase, pierDepthM: number, power: number): CantileverModel {
+  const { task, arms, supportsM, layout } = base;
+  const { mostM, mostOverDepth } = cantileverData.bottomSlab;
+  const depthsM = pierDepths(arms, task.depthM, pierDepthM);
+  const { beam, inertia, traffic, overSupports } = stiffDeck(task, arms, pierDepthM / task.depthM, power);
+  const n = beam.xM.length;
+  const armAt = new Int16Array(n);
+  const way = new Float64Array(n);
+  const depthM = new Float64Array(n);
+  for (let i = 0; i < n; i++) {
+    const place = placeAt(arms, supportsM, beam.xM[i]!);
+    armAt[i] = place.arm;
+    way[i] = place.way;
+    const arm = arms[place.arm];
+    depthM[i] = task.depthM + (arm ? (depthsM.get(arm.support)! - task.depthM) * haunchShare(place.way) : 0);
+  }
+  return {
+    ...base,
+    layout: { ...layout, slope: webSlope(layout.cells * layout.spacingM, pierDepthM) },
+    pierDepthM,
+    depthsM,
+    beam,
+    inertia,
+    armAt,
+    way,
+    depthM,
+    overSupports,
+    towardsPiers: towardsPiers(arms, armAt, beam),
+    superimposed: uniform(beam, task.deck.superimposedKNm),
+    traffic,
+    warmKNm: imposedCurvature(
+      beam,
+      depthM.map((depth) => 1 / depth),
+    ).momentKNm,
+    mostBottomM: Math.min(mostM, mostOverDepth * pierDepthM),
+  };
+}
+
+function towardsPiers(
+  arms: readonly Arm[],
+  armAt: Int16Array,
+  beam: LineBeam,
+): CantileverModel['towardsPiers'] {
+  const out = new Map<number, { readonly i: number; readonly away: number }[]>();
+  armAt.forEach((at, i) => {
+    const arm = arms[at];
+    if (!arm) return;
+    const mine = out.get(arm.support) ?? [];
+    mine.push({ i, away: Math.abs(beam.xM[i]! - arm.pierM) });
+    out.set(arm.support, mine);
+  });
+  for (const mine of out.values()) mine.sort((a, b) => b.away - a.away);
+  return out;
+}

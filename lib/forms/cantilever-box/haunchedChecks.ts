@@ -1,0 +1,98 @@
+import type { Check } from '../../model/index.ts';
+import { check } from '../common/checks.ts';
+import { trafficDeflection } from '../concrete-box/boxChecks.ts';
+import { boxData } from '../concrete-box/boxData.ts';
+import type { StressUse } from '../concrete-box/boxStress.ts';
+import type { BendingUse } from '../concrete-box/ultimateBending.ts';
+import type { CantileverModel } from './cantileverModel.ts';
+import { mostBottomStrands, mostTopStrands } from './findStrands.ts';
+import type { SizedHaunched } from './sizeHaunched.ts';
+
+/** All limit states of a haunched box and of its top slab; labels as they are printed. */
+export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Check[] {
+  const { found, bending, stresses, sections, shear, webs } = box;
+  const most = (values: Float64Array): number => values.reduce((a, b) => Math.max(a, b), 0);
+  const worst = (pick: (e: number) => number): number =>
+    webs.reduce((at, _, e) => (pick(e) > pick(at) ? e : at), 0);
+  const crushed = worst((e) => webs[e]!.crushing);
+  const crowded = worst((e) => webs[e]!.crowding);
+  const crushedKN = shear.demands[crushed]!.shearKN;
+  const piers = model.depthsM.size;
+  // Less than a strand a web is no tendon.
+  const needed = (need: Float64Array, there: Float64Array): [number, number] => {
+    let at = 0;
+    const use = (i: number): number =>
+      need[i]! < model.layout.webs ? 0 : need[i]! / Math.max(1e-9, there[i]!);
+    for (let i = 1; i < need.length; i++) if (use(i) > use(at)) at = i;
+    return [need[at]!, there[at]!];
+  };
+  return [
+    ...(piers > 0
+      ? [
+          moment('stage-bending', 'bending of the free arms with their travellers', bending.stage),
+          moment('bending-piers', 'bending over the piers', bending.hog),
+          check(
+            'service-top',
+            'top slab: compressed while cantilevering and in service',
+            ...needed(found.needTop, found.top),
+            'strands',
+          ),
+          stress('compression-piers', 'compression of the soffit at the piers', stresses.pierSoffit),
+        ]
+      : [check('balance', 'pier to cantilever from', 1, 0, 'piers')]),
+    moment('bending-spans', 'bending in the spans', bending.sag),
+    check(
+      'service-bottom',
+      'bottom slab: compressed in service after creep',
+      ...needed(found.needBottom, found.bottom),
+      'strands',
+    ),
+    stress('compression-spans', 'compression of the soffit in the spans', stresses.spanSoffit),
+    stress('compression-top', 'compression of the top slab', stresses.top),
+    check(
+      'web-struts',
+      'shear and torsion: struts of the outer web',
+      crushedKN,
+      crushedKN / Math.max(1e-9, webs[crushed]!.crushing),
+      'kN',
+    ),
+    check(
+      'web-stirrups',
+      'shear and torsion: stirrups that fit into the outer web',
+      webs[crowded]!.crowding * boxData.stirrupRatioMost.value,
+      boxData.stirrupRatioMost.value,
+      '1',
+    ),
+    check(
+      'top-room',
+      'strands that the top slab has room for',
+      most(found.top),
+      mostTopStrands(model),
+      'strands',
+    ),
+    check(
+      'bottom-room',
+      'strands that the bottom slab has room for',
+      most(found.bottom),
+      mostBottomStrands(sections),
+      'strands',
+    ),
+    check(
+      'inner-height',
+      'height inside for the forms',
+      boxData.leastInnerM.value,
+      Math.max(0, sections.midspan.outline.innerM),
+      'm',
+    ),
+    trafficDeflection(model, model.concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4),
+    ...model.layout.slab.checks,
+  ];
+}
+
+function moment(id: string, label: string, use: BendingUse): Check {
+  return check(id, label, use.demandKNm, use.capacityKNm, 'kNm');
+}
+
+function stress(id: string, label: string, { stressMPa, limitMPa }: StressUse): Check {
+  return check(id, label, stressMPa, limitMPa, 'MPa');
+}

@@ -1,0 +1,107 @@
+import type { SupportReaction } from '../../model/index.ts';
+import { middleStation } from '../common/middleStation.ts';
+import type { CantileverModel } from './cantileverModel.ts';
+import { haunchedBars } from './haunchedBars.ts';
+import { along, onFalseworkM, strandTotalKg, travellersOf } from './haunchedLines.ts';
+import type { SizedHaunched } from './sizeHaunched.ts';
+
+/**
+ * Characteristic reactions of the whole deck: own weight through its stages and creep with diaphragms, superimposed
+ * load, traffic. The parasitic part of the tendons adds up to nothing and is left out.
+ */
+export function haunchedReactions(model: CantileverModel, { weight }: SizedHaunched): SupportReaction[] {
+  const { most } = model.traffic;
+  const last = model.supportsM.length - 1;
+  // At the two ends the reaction is the shear beside it.
+  const end = (j: number): number =>
+    j === 0 ? most.shearMaxKN[0]! : j === last ? -most.shearMinKN[most.shearMinKN.length - 1]! : 0;
+  return model.supportsM.map((_, j) => ({
+    permanentKN: weight.reactionKN[j]! + model.superimposed.reactionKN[j]!,
+    trafficMaxKN: Math.max(most.reactionMaxKN[j]!, end(j)),
+    trafficMinKN: most.reactionMinKN[j]!,
+  }));
+}
+
+/** Own weight of the governing characteristic moment, 0 to 1. */
+export function haunchedOwnShare(model: CantileverModel, { weight }: SizedHaunched): number {
+  const { most } = model.traffic;
+  let worst = 0;
+  let share = 0;
+  for (let i = 0; i < most.momentMaxKNm.length; i++) {
+    const own = weight.lastingKNm[i]!;
+    const lasting = own + model.superimposed.momentKNm[i]!;
+    const total = lasting + (lasting < 0 ? most.momentMinKNm[i]! : most.momentMaxKNm[i]!);
+    if (!(Math.abs(total) > worst)) continue;
+    worst = Math.abs(total);
+    share = own / total;
+  }
+  return Math.min(1, Math.max(0, share));
+}
+
+/** Named figures of section, stages, statics and tendons. */
+export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Record<string, number> {
+  const { layout, beam, task, traffic, lengthM } = model;
+  const { sections, found, weight, thicknesses, stresses, shear } = box;
+  const areaM2 = lengthM * task.deck.widthM;
+  const concreteM3 = weight.boxM3 + weight.blistersM3 + weight.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
+  const { pairs } = travellersOf(model);
+  const most = (values: Float64Array): number => values.reduce((a, b) => Math.max(a, b), 0);
+  const figures: Record<string, number> = {
+    cells: layout.cells,
+    webs: layout.webs,
+    webSpacingM: layout.spacingM,
+    overhangM: layout.overhangM,
+    topSlabMidM: layout.slab.midM,
+    topSlabRootM: layout.slab.rootM,
+    webM: thicknesses.webM,
+    webAtSupportsM: thicknesses.supportWebM,
+    bottomSlabM: thicknesses.bottomM,
+    bottomSlabAtPiersM: thicknesses.pierBottomM,
+    boxInnerHeightM: Math.max(0, sections.midspan.outline.innerM),
+    areaM2: sections.midspan.areaM2,
+    inertiaM4: sections.midspan.inertiaM4,
+    centroidFromTopM: sections.midspan.topM,
+    pierAreaM2: sections.pier.areaM2,
+    pierInertiaM4: sections.pier.inertiaM4,
+    pierCentroidFromTopM: sections.pier.topM,
+    governingSpanM: model.governingM,
+    armM: model.arms.length > 0 ? Math.max(...model.arms.map(({ armM }) => armM)) : 0,
+    segmentM: weight.segmentM,
+    segmentsPerArm: weight.segmentsPerArm,
+    heaviestSegmentKN: weight.heaviestKN,
+    travellerKN: weight.travellerKN,
+    travellerPairs: pairs,
+    unbalancedMomentKNm: weight.unbalancedKNm,
+    onFalseworkM: onFalseworkM(model).reduce((sum, m) => sum + m, 0),
+    topStrandCount: most(found.top),
+    bottomStrandCount: most(found.bottom),
+    topStrandMean: along(model, found.top) / lengthM,
+    bottomStrandMean: along(model, found.bottom) / lengthM,
+    jackingStressMPa: found.stresses.top.jackMPa,
+    lastingTopStressMPa: found.stresses.top.lastingMPa,
+    lastingBottomStressMPa: found.stresses.bottom.lastingMPa,
+    pierSoffitMPa: stresses.pierSoffit.stressMPa,
+    webTrafficShare: shear.webShare,
+    shearDesignKN: shear.mostKN,
+    chordShearKN: shear.chordKN,
+    concreteM3M2: concreteM3 / areaM2,
+    barsKgM3: haunchedBars(model, box).totalKg / concreteM3,
+    strandKgM2: strandTotalKg(model, box) / areaM2,
+  };
+  for (let span = 0; span < task.spansM.length; span++) {
+    const middle = middleStation(beam, span);
+    figures[`span${span + 1}OwnKNm`] = weight.lastingKNm[middle]!;
+    figures[`span${span + 1}OpenKNm`] = weight.openKNm[middle]!;
+    figures[`span${span + 1}TrafficKNm`] = traffic.most.momentMaxKNm[middle]!;
+    figures[`span${span + 1}ParasiticKNm`] = found.parasiticBottomKNm[middle]!;
+  }
+  for (let pier = 1; pier < task.spansM.length; pier++) {
+    const station = beam.supportAt[pier]!;
+    figures[`pier${pier}CantileverKNm`] = weight.cantileverKNm[station]!;
+    figures[`pier${pier}OpenKNm`] = weight.openKNm[station]!;
+    figures[`pier${pier}OwnKNm`] = weight.lastingKNm[station]!;
+    figures[`pier${pier}AtOnceKNm`] = weight.atOnce.momentKNm[station]!;
+    figures[`pier${pier}TrafficKNm`] = traffic.most.momentMinKNm[station]!;
+  }
+  return figures;
+}

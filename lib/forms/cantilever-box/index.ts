@@ -1,0 +1,53 @@
+import type { Design, UnitTask } from '../../model/index.ts';
+import { checkUnitTask } from '../common/checkUnitTask.ts';
+import { limiting } from '../common/checks.ts';
+import { overLimit } from '../common/warnings.ts';
+import { heightUnder } from '../concrete-box/heightUnder.ts';
+import type { FormModule } from '../formModule.ts';
+import { choosePierDepth } from './choosePierDepth.ts';
+import { haunchedCuts, haunchedDepth, haunchedElevation } from './haunchedDrawing.ts';
+import { haunchedLines } from './haunchedLines.ts';
+import { haunchedFigures, haunchedOwnShare, haunchedReactions } from './haunchedReport.ts';
+import { haunchedWarnings } from './haunchedWarnings.ts';
+
+/**
+ * Prestressed concrete box with a curved soffit, cast in place by cantilevering from its piers segment by segment.
+ * `depthM` of the task is the depth at midspan; that over the piers is found inside its published band. Continuous units
+ * of two spans or more, main spans of about 50 to 250 m; a single span has no pier to balance on and is refused by its
+ * first check.
+ */
+export const cantileverBox: FormModule = {
+  id: 'cantilever-box',
+  family: 'box',
+  name: 'Cantilevered concrete box',
+  pattern: { kind: 'continuous' },
+  methods: ['balanced-cantilever'],
+  size,
+};
+
+/** @throws RangeError for spans, depth or widths that are not possible */
+function size(task: UnitTask): Design {
+  checkUnitTask(task);
+  const { model, box, checks } = choosePierDepth(task);
+  const reactions = haunchedReactions(model, box);
+  const warnings = [...overLimit(checks, 'tendons and concrete'), ...haunchedWarnings(model, box, reactions)];
+  if (!heightUnder(task).known)
+    warnings.push(
+      `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).meanM} m above ground.`,
+    );
+  return {
+    task,
+    depthM: { support: model.pierDepthM, midspan: task.depthM },
+    depthAlong: haunchedDepth(model),
+    elevation: haunchedElevation(model, box),
+    sections: haunchedCuts(model, box),
+    reactions,
+    checks,
+    limitingCheck: limiting(checks),
+    ownWeightShare: haunchedOwnShare(model, box),
+    lines: haunchedLines(model, box),
+    heaviestPiece: null,
+    warnings,
+    figures: haunchedFigures(model, box),
+  };
+}

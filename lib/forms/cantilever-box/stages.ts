@@ -1,0 +1,189 @@
+import {
+  cantileverStages,
+  creepRedistributed,
+  distributed,
+  pointLoads,
+  stepped,
+  type CantileverMoments,
+  type Effects,
+} from '../../mechanics/index.ts';
+import { boxData } from '../concrete-box/boxData.ts';
+import { diaphragmM3 } from '../concrete-box/boxLoads.ts';
+import type { Arm } from './arms.ts';
+import { cantileverData } from './cantileverData.ts';
+import type { CantileverModel } from './cantileverModel.ts';
+import type { HaunchedSections } from './sectionsAlong.ts';
+
+/** Own weight of the box through its stages. Moments sagging positive, at the stations. */
+export interface StagedWeight {
+  /** Segment length, weight of the heaviest segment and of a traveller, m and kN. */
+  readonly segmentM: number;
+  readonly heaviestKN: number;
+  readonly travellerKN: number;
+  readonly segmentsPerArm: number;
+  /** Free cantilevers with a traveller at each tip, just before they are joined. */
+  readonly cantileverKNm: Float64Array;
+  /** When all is joined and travellers and falsework are gone; after creep; had it been built in one go. */
+  readonly openKNm: Float64Array;
+  readonly lastingKNm: Float64Array;
+  readonly atOnce: Effects;
+  /** After creep. */
+  readonly shearLeftKN: Float64Array;
+  readonly shearRightKN: Float64Array;
+  readonly reactionKN: readonly number[];
+  /** Moment a pier takes with one arm a segment ahead and heavier by a share, the most of all piers, kNm. */
+  readonly unbalancedKNm: number;
+  /** Weight along the deck, kN/m, and concrete, m3: along the deck, blisters, diaphragm over each support. */
+  readonly loadKNm: Float64Array;
+  readonly boxM3: number;
+  readonly blistersM3: number;
+  readonly diaphragmM3: readonly number[];
+}
+
+/** Stations of a free arm. */
+const armStations = 40;
+
+/** Share of the moments of the joined deck that creep brings about of what it would have been at once. */
+export const creepShare = creepRedistributed(
+  { xM: new Float64Array(1), builtKNm: new Float64Array(1), atOnceKNm: new Float64Array([1]) },
+  cantileverData.creep.factor,
+)[0]!;
+
+/**
+ * Arms as free cantilevers, then pieces on falsework and the travellers' going on the joined deck, then creep towards
+ * what the deck would carry had it been struck in one go. Diaphragms stand on their supports.
+ */
+export function stagedWeight(model: CantileverModel, sections: HaunchedSections): StagedWeight {
+  const { beam, standard, arms, supportsM } = model;
+  const { share } = boxData.blisters;
+  const gamma = standard.unitWeights.concreteKNm3;
+  const weight = gamma * (1 + share);
+  const loadKNm = sections.areaM2.map((area) => weight * area);
+  const n = loadKNm.length;
+  const atOnce = distributed(beam, loadKNm);
+  const longest = arms.length > 0 ? Math.max(...arms.map(({ armM }) => armM)) : 0;
+  const rootKNm = weight * sections.pier.areaM2;
+  const { leastM, mostM, mostKN } = cantileverData.segment;
+  const segmentM = Math.min(mostM, Math.max(leastM, mostKN / rootKNm));
+  const heaviestKN = rootKNm * segmentM;
+  const { overSegment, leastKN, mostKN: heaviestTraveller } = cantileverData.traveller;
+  const travellerKN = Math.min(heaviestTraveller, Math.max(leastKN, overSegment * heaviestKN));
+
+  const free = freeArms(model, sections, weight, travellerKN, segmentM);
+  const cantileverKNm = new Float64Array(n);
+  const armOf = Array.from({ length: n - 1 }, (_, e) => armWith(arms, (beam.xM[e]! + beam.xM[e + 1]!) / 2));
+  for (let i = 0; i < n; i++) {
+    const arm = armOf[i] ?? armOf[i - 1];
+    if (!arm) continue;
+    const { fromPierM, momentKNm } = free.get(arm)!;
+    cantileverKNm[i] = read(fromPierM, momentKNm, Math.abs(beam.xM[i]! - arm.pierM));
+  }
+  /** Shear of the free arm just left or right of a station. */
+  const freeShear = (i: number, side: 'shearLeftKN' | 'shearRightKN'): number => {
+    const arm = armOf[side === 'shearLeftKN' ? i - 1 : i];
+    if (!arm) return 0;
+    const { fromPierM, shearKN } = free.get(arm)!;
+    return arm.side * read(fromPierM, shearKN, Math.abs(beam.xM[i]! - arm.pierM));
+  };
+  // What is cast on falsework, and the travellers that leave, act on the joined deck.
+  const late = new Float64Array(n - 1);
+  for (let e = 0; e < n - 1; e++) if (!armOf[e]) late[e] = (loadKNm[e]! + loadKNm[e + 1]!) / 2;
+  const onFalsework = stepped(beam, late);
+  const leaving = pointLoads(
+    beam,
+    arms.map((arm) => ({ xM: arm.pierM + arm.side * arm.armM, loadKN: -travellerKN })),
+  );
+  const mix = (open: number, once: number): number => open + creepShare * (once - open);
+  const openKNm = cantileverKNm.map(
+    (moment, i) => moment + onFalsework.momentKNm[i]! + leaving.momentKNm[i]!,
+  );
+  const lastingKNm = creepRedistributed(
+    { xM: beam.xM, builtKNm: openKNm, atOnceKNm: atOnce.momentKNm },
+    cantileverData.creep.factor,
+  );
+  const shear = (side: 'shearLeftKN' | 'shearRightKN'): Float64Array =>
+    Float64Array.from({ length: n }, (_, i) =>
+      mix(freeShear(i, side) + onFalsework[side][i]! + leaving[side][i]!, atOnce[side][i]!),
+    );
+  const diaphragms = supportsM.map((_, j) =>
+    diaphragmM3(sections.pierAt.get(j) ?? sections.end, sections.pierAt.has(j)),
+  );
+  let boxM3 = 0;
+  for (let e = 0; e < n - 1; e++)
+    boxM3 += ((sections.areaM2[e]! + sections.areaM2[e + 1]!) / 2) * (beam.xM[e + 1]! - beam.xM[e]!);
+  const reactionKN = supportsM.map((_, j) => {
+    const armsKN = arms.reduce((sum, arm) => sum + (arm.support === j ? free.get(arm)!.shearKN[0]! : 0), 0);
+    const open = armsKN + onFalsework.reactionKN[j]! + leaving.reactionKN[j]!;
+    return mix(open, atOnce.reactionKN[j]!) + gamma * diaphragms[j]!;
+  });
+  const { ownShare } = cantileverData.imbalance;
+  const unbalancedKNm = Math.max(
+    0,
+    ...[...free].map(
+      ([arm, at]) => at.pierMomentKNm + ownShare * Math.abs(at.momentKNm[0]! + travellerKN * arm.armM),
+    ),
+  );
+  return {
+    segmentM,
+    heaviestKN,
+    travellerKN,
+    segmentsPerArm: Math.ceil(Math.max(0, longest - cantileverData.pierTableM.value / 2) / segmentM),
+    cantileverKNm,
+    openKNm,
+    lastingKNm,
+    atOnce,
+    shearLeftKN: shear('shearLeftKN'),
+    shearRightKN: shear('shearRightKN'),
+    reactionKN,
+    unbalancedKNm,
+    loadKNm,
+    boxM3,
+    blistersM3: share * boxM3,
+    diaphragmM3: diaphragms,
+  };
+}
+
+/** The arm that is cantilevered over `xM`, if any. */
+function armWith(arms: readonly Arm[], xM: number): Arm | undefined {
+  return arms.find(({ pierM, side, armM }) => {
+    const away = side * (xM - pierM);
+    return away >= 0 && away <= armM;
+  });
+}
+
+/** Statics of every free arm; equal arms are worked out once. */
+function freeArms(
+  model: CantileverModel,
+  sections: HaunchedSections,
+  weight: number,
+  travellerKN: number,
+  segmentM: number,
+): Map<Arm, CantileverMoments> {
+  const made = new Map<string, CantileverMoments>();
+  return new Map(
+    model.arms.map((arm) => {
+      const key = [model.depthsM.get(arm.support), arm.armM, arm.haunchM].map((v) => v!.toFixed(6)).join();
+      const areaM2 = sections.armAreaM2.get(arm.support)!;
+      const at =
+        made.get(key) ??
+        cantileverStages(
+          {
+            armM: arm.armM,
+            weightKNm: (fromPierM) => weight * areaM2(Math.min(1, fromPierM / arm.haunchM)),
+            travellerKN,
+            segmentM: Math.min(segmentM, arm.armM),
+          },
+          armStations,
+        );
+      made.set(key, at);
+      return [arm, at];
+    }),
+  );
+}
+
+function read(xM: Float64Array, values: Float64Array, x: number): number {
+  const step = xM[1]! - xM[0]!;
+  const k = Math.min(xM.length - 2, Math.max(0, Math.floor(x / step)));
+  const share = Math.min(1, (x - xM[k]!) / step);
+  return values[k]! + share * (values[k + 1]! - values[k]!);
+}

@@ -1,0 +1,62 @@
+import { trafficOnDeck } from '../../actions/index.ts';
+import { lineBeam, type LineBeam } from '../../mechanics/index.ts';
+import type { UnitTask } from '../../model/index.ts';
+import { trafficOnBox, type BoxTraffic } from '../concrete-box/boxTraffic.ts';
+import { supportPositions } from '../common/supports.ts';
+import { tipsM, type Arm } from './arms.ts';
+import { haunchShare, pierDepths, placeAt } from './haunch.ts';
+import { overSupports, type OverSupports } from './parasitic.ts';
+
+/** Line beam of a haunched deck with the traffic on it. Its stiffness is 1 at midspan. */
+export interface StiffDeck {
+  readonly beam: LineBeam;
+  /** Inertia over that at midspan, at the stations. */
+  readonly inertia: Float64Array;
+  readonly traffic: BoxTraffic;
+  readonly overSupports: OverSupports;
+}
+
+/** Stations of a span. */
+export const stationsPerSpan = 20;
+const kept = new Map<string, StiffDeck>();
+
+/**
+ * The beam by how much deeper and stiffer the deck is over the piers. Both ratios are rounded (to a tenth and to a quarter
+ * of the exponent) so that trials of depth share their influence lines; the last 64 decks are kept.
+ * @param depthRatio depth over the pier of the longest arms over that at midspan, 1 or more
+ * @param power of the depth by which the inertia grows
+ */
+export function stiffDeck(
+  task: UnitTask,
+  arms: readonly Arm[],
+  depthRatio: number,
+  power: number,
+): StiffDeck {
+  const ratio = Math.round(10 * depthRatio) / 10;
+  const exponent = Math.round(4 * power) / 4;
+  const key = JSON.stringify([task.standard, task.spansM, task.deck, ratio, exponent]);
+  const known = kept.get(key);
+  if (known) return known;
+  const supportsM = supportPositions(task.spansM);
+  const depths = pierDepths(arms, 1, ratio);
+  const inertiaAt = (xM: number): number => {
+    const { arm, way } = placeAt(arms, supportsM, xM);
+    if (arm < 0) return 1;
+    return (1 + (depths.get(arms[arm]!.support)! - 1) * haunchShare(way)) ** exponent;
+  };
+  const beam = lineBeam({
+    spansM: task.spansM,
+    eiKNm2: inertiaAt,
+    stationsPerSpan,
+    extraStationsM: tipsM(arms, task.spansM, stationsPerSpan),
+  });
+  const made: StiffDeck = {
+    beam,
+    inertia: beam.xM.map(inertiaAt),
+    overSupports: overSupports(beam),
+    traffic: trafficOnBox(beam, trafficOnDeck(task.standard, task.deck)),
+  };
+  if (kept.size >= 64) for (const [oldest] of [...kept].slice(0, 32)) kept.delete(oldest);
+  kept.set(key, made);
+  return made;
+}

@@ -1,0 +1,210 @@
+import { barDesignMPa } from '../common/bars.ts';
+import { compressionDepth, faceBarsM2, strandDesignMPa } from '../concrete-box/bendingCapacity.ts';
+import { boxData } from '../concrete-box/boxData.ts';
+import type { TendonStress } from '../concrete-box/tendonForce.ts';
+import { cantileverData } from './cantileverData.ts';
+import { parasiticKNm } from './parasitic.ts';
+import type { CantileverModel } from './cantileverModel.ts';
+import type { HaunchedSections } from './sectionsAlong.ts';
+import { creepShare, type StagedWeight } from './stages.ts';
+
+/** Strands of both families at the stations, whole deck, with the parasitic moment of their lasting forces, kNm. */
+export interface Strands {
+  readonly top: Float64Array;
+  readonly bottom: Float64Array;
+  readonly parasiticTopKNm: Float64Array;
+  readonly parasiticBottomKNm: Float64Array;
+}
+
+/** Stresses of the two families. */
+export interface StrandStresses {
+  readonly top: TendonStress;
+  readonly bottom: TendonStress;
+}
+
+/** Forces of one strand in a state, kN, and the part of the parasitic moments of the lasting forces that acts in it. */
+export interface StrandState {
+  readonly topKN: number;
+  readonly bottomKN: number;
+  readonly topParasitic: number;
+  readonly bottomParasitic: number;
+}
+
+/** Design moments at the stations without prestress, kNm: service and ultimate extremes of the deck in use. */
+export interface UseMoments {
+  readonly openMax: Float64Array;
+  readonly openMin: Float64Array;
+  readonly lastingMax: Float64Array;
+  readonly lastingMin: Float64Array;
+  readonly ultimateMax: Float64Array;
+  readonly ultimateMin: Float64Array;
+}
+
+/** The deck just joined, and after creep and losses; tendons over the piers bend the joined deck only as it creeps. */
+export function strandStates(
+  model: CantileverModel,
+  { top, bottom }: StrandStresses,
+): { readonly open: StrandState; readonly lasting: StrandState } {
+  const kN = model.strandM2 * 1e3;
+  return {
+    open: {
+      topKN: top.initialMPa * kN,
+      bottomKN: bottom.initialMPa * kN,
+      topParasitic: 0,
+      bottomParasitic: bottom.initialMPa / bottom.lastingMPa,
+    },
+    lasting: {
+      topKN: top.lastingMPa * kN,
+      bottomKN: bottom.lastingMPa * kN,
+      topParasitic: creepShare,
+      bottomParasitic: 1,
+    },
+  };
+}
+
+/** Strands with their parasitic moments: the joined deck bends under each family by its eccentricity over stiffness. */
+export function withParasitic(
+  model: CantileverModel,
+  sections: HaunchedSections,
+  stresses: StrandStresses,
+  top: Float64Array,
+  bottom: Float64Array,
+): Strands {
+  const kN = model.strandM2 * 1e3;
+  const { coverM: topCover } = cantileverData.topTendons;
+  const { coverM: lowCover } = cantileverData.bottomTendons;
+  const n = top.length;
+  const above = new Float64Array(n);
+  const below = new Float64Array(n);
+  for (let i = 0; i < n; i++) {
+    above[i] = (top[i]! * stresses.top.lastingMPa * kN * (sections.topM[i]! - topCover)) / model.inertia[i]!;
+    below[i] =
+      (-bottom[i]! * stresses.bottom.lastingMPa * kN * (sections.lowM[i]! - lowCover)) / model.inertia[i]!;
+  }
+  return {
+    top,
+    bottom,
+    parasiticTopKNm: parasiticKNm(model.beam, model.overSupports, above),
+    parasiticBottomKNm: parasiticKNm(model.beam, model.overSupports, below),
+  };
+}
+
+/** Moments of the deck in use, from weight through its stages, superimposed load, traffic and temperature gradient. */
+export function useMoments(
+  model: CantileverModel,
+  sections: HaunchedSections,
+  weight: StagedWeight,
+): UseMoments {
+  const { gradient } = boxData;
+  const { uls } = model.standard.factors;
+  const { service, most } = model.traffic;
+  const stiff =
+    gradient.withTraffic * gradient.expansion1PerK * model.concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4;
+  const n = sections.areaM2.length;
+  const out = {
+    openMax: new Float64Array(n),
+    openMin: new Float64Array(n),
+    lastingMax: new Float64Array(n),
+    lastingMin: new Float64Array(n),
+    ultimateMax: new Float64Array(n),
+    ultimateMin: new Float64Array(n),
+  };
+  for (let i = 0; i < n; i++) {
+    const sup = model.superimposed.momentKNm[i]!;
+    // A warm top arches the deck: the piers hold it down and it sags.
+    const arched = -model.warmKNm[i]! * stiff;
+    const warm = arched * gradient.topWarmerK;
+    const cool = -arched * gradient.topCoolerK;
+    const max = sup + service.momentMaxKNm[i]! + Math.max(warm, cool);
+    const min = sup + service.momentMinKNm[i]! + Math.min(warm, cool);
+    const open = weight.openKNm[i]!;
+    const lasting = weight.lastingKNm[i]!;
+    out.openMax[i] = open + max;
+    out.openMin[i] = open + min;
+    out.lastingMax[i] = lasting + max;
+    out.lastingMin[i] = lasting + min;
+    const use = uls.superimposed * sup;
+    out.ultimateMax[i] = uls.permanent * Math.max(open, lasting) + use + uls.traffic * most.momentMaxKNm[i]!;
+    out.ultimateMin[i] = uls.permanent * Math.min(open, lasting) + use + uls.traffic * most.momentMinKNm[i]!;
+  }
+  return out;
+}
+
+/**
+ * Strands every station asks for, top then bottom, given the strands of the pass before: no tension over the piers while
+ * cantilevering, decompression (or the tension allowed) in use before and after creep, ultimate bending in both.
+ */
+export function strandsNeeded(
+  model: CantileverModel,
+  sections: HaunchedSections,
+  weight: StagedWeight,
+  use: UseMoments,
+  stresses: StrandStresses,
+  before: Strands,
+): [top: Float64Array, bottom: Float64Array] {
+  const n = sections.areaM2.length;
+  const top = new Float64Array(n);
+  const bottom = new Float64Array(n);
+  const spread = boxData.prestressSpread[model.standardId];
+  const tension = boxData.serviceTensionMPa[model.standardId] * 1e3;
+  const stageTension = cantileverData.stageTensionMPa.value * 1e3;
+  const around = model.standardId === 'lm1' ? boxData.decompressedAroundDuctM.value : Infinity;
+  const { open, lasting } = strandStates(model, stresses);
+  const { coverM: topCover } = cantileverData.topTendons;
+  const { coverM: lowCover } = cantileverData.bottomTendons;
+  const { uls } = model.standard.factors;
+  const designKN = strandDesignMPa(model) * model.strandM2 * 1e3;
+  const bars = barDesignMPa(model.standardId) * 1e3;
+  const topBars = bars * faceBarsM2(model.task.deck.widthM);
+  const ultimatePart = uls.prestress;
+  for (let i = 0; i < n; i++) {
+    const area = sections.areaM2[i]!;
+    const inertia = sections.inertiaM4[i]!;
+    const et = sections.topM[i]! - topCover;
+    const eb = sections.lowM[i]! - lowCover;
+    const yt = Math.min(sections.topM[i]!, et + around) / inertia;
+    const yb = Math.min(sections.lowM[i]!, eb + around) / inertia;
+    const nt = before.top[i]!;
+    const nb = before.bottom[i]!;
+    const pt = before.parasiticTopKNm[i]!;
+    const pb = before.parasiticBottomKNm[i]!;
+    const stage = weight.cantileverKNm[i]!;
+    if (stage < 0) {
+      const y = sections.topM[i]! / inertia;
+      const perKN = spread * (1 / area + et * y);
+      top[i] = Math.max(0, (-stage * y - stageTension) / (perKN * open.topKN));
+    }
+    for (const [state, max, min] of [
+      [open, use.openMax[i]!, use.openMin[i]!],
+      [lasting, use.lastingMax[i]!, use.lastingMin[i]!],
+    ] as const) {
+      const extra = spread * (state.topParasitic * pt + state.bottomParasitic * pb);
+      const t = spread * nt * state.topKN;
+      const b = spread * nb * state.bottomKN;
+      const topShort = -(b / area + (min + extra - b * eb) * yt + tension);
+      top[i] = Math.max(top[i]!, topShort / (spread * state.topKN * (1 / area + et * yt)));
+      const lowShort = (max + extra + t * et) * yb - t / area - tension;
+      bottom[i] = Math.max(bottom[i]!, lowShort / (spread * state.bottomKN * (1 / area + eb * yb)));
+    }
+    const depth = model.depthM[i]!;
+    const websM = model.layout.webs * sections.webM[i]!;
+    const lowBars = bars * faceBarsM2(sections.bottomWidthM[i]!);
+    // Either end of what creep does to the parasitic moment of the tendons over the piers.
+    const along = [pb, pb + lasting.topParasitic * pt] as const;
+    const hog = Math.max(-(use.ultimateMin[i]! + ultimatePart * Math.min(...along)), -uls.permanent * stage);
+    if (hog > 0) {
+      const face = { widthM: sections.bottomWidthM[i]!, flangeM: model.mostBottomM, websM };
+      const c = compressionDepth(model, face, nt * designKN + topBars);
+      const rest = hog - topBars * (depth - topCover / 2 - c);
+      top[i] = Math.max(top[i]!, rest / (designKN * (depth - topCover - c)));
+    }
+    const sag = use.ultimateMax[i]! + ultimatePart * Math.max(...along);
+    if (sag > 0) {
+      const face = { widthM: model.task.deck.widthM, flangeM: model.layout.slab.meanM, websM };
+      const c = compressionDepth(model, face, nb * designKN + lowBars);
+      const rest = sag - lowBars * (depth - lowCover / 2 - c);
+      bottom[i] = Math.max(bottom[i]!, rest / (designKN * (depth - lowCover - c)));
+    }
+  }
+  return [top, bottom];
+}
