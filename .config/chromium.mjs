@@ -24,9 +24,16 @@ async function downloaded() {
 function aptInstall() {
   if (process.platform !== 'linux' || process.getuid?.() !== 0 || !existsSync('/usr/bin/apt-get')) return;
   process.stdout.write('No Chromium found; installing it with apt-get ...\n');
-  const quiet = { stdio: ['ignore', 'ignore', 'inherit'], env: { ...process.env, DEBIAN_FRONTEND: 'noninteractive' } };
+  const quiet = {
+    stdio: ['ignore', 'ignore', 'inherit'],
+    env: { ...process.env, DEBIAN_FRONTEND: 'noninteractive' },
+  };
   spawnSync('apt-get', ['update', '-qq'], quiet);
-  spawnSync('apt-get', ['install', '-y', '-qq', '--no-install-recommends', 'chromium', 'fonts-dejavu-core'], quiet);
+  spawnSync(
+    'apt-get',
+    ['install', '-y', '-qq', '--no-install-recommends', 'chromium', 'fonts-dejavu-core'],
+    quiet,
+  );
 }
 
 /** Path of a Chromium: the variable CHROMIUM, the usual places, apt-get when root, the browser installer, in this order. */
@@ -34,7 +41,9 @@ export async function findChromium() {
   const named = process.env.CHROMIUM;
   if (named) {
     if (existsSync(named)) return named;
-    throw new Error(`CHROMIUM names ${named}, which does not exist. Name a Chromium, or unset it to have one found.`);
+    throw new Error(
+      `CHROMIUM names ${named}, which does not exist. Name a Chromium, or unset it to have one found.`,
+    );
   }
   const here = () => usualPlaces.find((place) => existsSync(place));
   let found = here() ?? (await downloaded());
@@ -44,9 +53,13 @@ export async function findChromium() {
   }
   if (!found) {
     process.stdout.write('Trying the browser installer of playwright-core ...\n');
-    spawnSync(process.execPath, [resolve(root, 'node_modules/playwright-core/cli.js'), 'install', 'chromium'], {
-      stdio: 'inherit',
-    });
+    spawnSync(
+      process.execPath,
+      [resolve(root, 'node_modules/playwright-core/cli.js'), 'install', 'chromium'],
+      {
+        stdio: 'inherit',
+      },
+    );
     found = await downloaded();
   }
   if (!found) {

@@ -19,9 +19,12 @@ export function fail(words) {
 }
 
 export function install() {
-  if (Number(process.versions.node.split('.')[0]) < 20) fail(`Node 20 or newer is needed, this is ${process.version}.`);
+  if (Number(process.versions.node.split('.')[0]) < 20)
+    fail(`Node 20 or newer is needed, this is ${process.version}.`);
   const stamp = resolve(root, 'node_modules/.spanledger-lock');
-  const lock = createHash('sha256').update(readFileSync(resolve(root, 'package-lock.json'))).digest('hex');
+  const lock = createHash('sha256')
+    .update(readFileSync(resolve(root, 'package-lock.json')))
+    .digest('hex');
   if (existsSync(stamp) && readFileSync(stamp, 'utf8') === lock) return;
   process.stdout.write('Installing packages (the lock file is new or has changed) ...\n');
   run('npm', ['ci', '--no-audit', '--no-fund', '--loglevel=error']);

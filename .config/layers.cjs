@@ -1,5 +1,16 @@
 // The layer rules: a stage imports only from stages to its left and from what stands beside the pipeline.
-const stages = ['study', 'site', 'arrange', 'forms', 'substructure', 'takeoff', 'programme', 'price', 'decide', 'record'];
+const stages = [
+  'study',
+  'site',
+  'arrange',
+  'forms',
+  'substructure',
+  'takeoff',
+  'programme',
+  'price',
+  'decide',
+  'record',
+];
 const beside = ['model', 'mechanics', 'rules', 'units', 'messages'];
 const stage = (name) => `^lib/${name}(/|\\.ts$)`;
 
@@ -8,7 +19,12 @@ const leftToRight = stages.map((name, i) => ({
   comment: `lib/${name} imports only from stages to its left`,
   severity: 'error',
   from: { path: stage(name) },
-  to: { path: stages.slice(i + 1).map(stage).concat(['^lib/(appraise|costTable|index|cli)']) },
+  to: {
+    path: stages
+      .slice(i + 1)
+      .map(stage)
+      .concat(['^lib/(appraise|costTable|index|cli)']),
+  },
 }));
 
 module.exports = {
@@ -52,7 +68,12 @@ module.exports = {
       from: { path: '^lib', pathNot: '^lib/cli' },
       to: { dependencyTypes: ['core'] },
     },
-    { name: 'cli-stands-alone', severity: 'error', from: { path: '^lib', pathNot: '^lib/cli' }, to: { path: '^lib/cli' } },
+    {
+      name: 'cli-stands-alone',
+      severity: 'error',
+      from: { path: '^lib', pathNot: '^lib/cli' },
+      to: { path: '^lib/cli' },
+    },
   ],
   options: {
     doNotFollow: { path: 'node_modules' },

@@ -1,7 +1,7 @@
 import type { FormId } from './ids.ts';
 
-/** What a fact may hold: unknown facts stay unknown and say so. */
-export type FactValue = number | string | boolean | 'unknown';
+/** What a fact may hold; the word 'unknown' stands for what nobody knows yet, and stays unknown. */
+export type FactValue = number | boolean | string;
 export type Facts = Readonly<Record<string, FactValue>>;
 
 export type Effect = 'out' | 'caution' | 'in favour' | 'to confirm';

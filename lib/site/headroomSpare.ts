@@ -15,7 +15,11 @@ export interface HeadroomSpare {
  * nothing has to be kept clear. Limits and depths are straight between their points, so the ends of the limits and the
  * bends of the depth under them are enough.
  */
-export function headroomSpare(site: Site, profile: RoadProfile, depth: number | DepthAlong): HeadroomSpare | null {
+export function headroomSpare(
+  site: Site,
+  profile: RoadProfile,
+  depth: number | DepthAlong,
+): HeadroomSpare | null {
   let least: HeadroomSpare | null = null;
   for (const limit of site.soffitLimits) {
     const from = Math.max(limit.fromM, site.startM);

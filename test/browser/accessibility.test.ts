@@ -25,11 +25,17 @@ it.each([
   const { page } = await site.open(path, { width, height: 900 });
   await page.waitForSelector(path.startsWith('option') ? '[data-option]' : '.cell', { timeout: 60_000 });
   // The checker is evaluated by the test, past the page's content policy.
-  const faults = await page.evaluate(async (source) => {
-    (0, eval)(source);
-    const checker = (window as unknown as { axe: { run(): Promise<{ violations: Found[] }> } }).axe;
-    const { violations } = await checker.run();
-    return violations.map(({ id, impact, nodes }) => ({ id, impact, at: nodes.slice(0, 3).map((node) => node.target) }));
-  }, axe).catch((error: unknown) => [{ id: 'not run', impact: 'serious', at: [String(error)] }]);
+  const faults = await page
+    .evaluate(async (source) => {
+      (0, eval)(source);
+      const checker = (window as unknown as { axe: { run(): Promise<{ violations: Found[] }> } }).axe;
+      const { violations } = await checker.run();
+      return violations.map(({ id, impact, nodes }) => ({
+        id,
+        impact,
+        at: nodes.slice(0, 3).map((node) => node.target),
+      }));
+    }, axe)
+    .catch((error: unknown) => [{ id: 'not run', impact: 'serious', at: [String(error)] }]);
   expect(faults.filter(({ impact }) => impact === 'serious' || impact === 'critical')).toEqual([]);
 });
