@@ -89,3 +89,8 @@ export function listed(words: readonly string[]): string {
   if (words.length < 2) return words.join('');
   return `${words.slice(0, -1).join(', ')} and ${words[words.length - 1] ?? ''}`;
 }
+
+const small = 'no one two three four five six seven eight nine ten eleven twelve'.split(' ');
+
+/** A count in words up to twelve, in figures beyond. */
+export const countWords = (count: number): string => small[count] ?? String(count);

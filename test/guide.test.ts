@@ -36,16 +36,17 @@ describe('guide({spanM, widthM, lengthM, radiusM})', () => {
     expect(form(guide({ spanM }), id).status).toBe('in');
   });
 
-  it('making the change that is named changes the status', () => {
+  it('making the change that is named brings the status that is named', () => {
     for (const spanM of [15, 45, 95, 180, 400])
       for (const one of guide({ spanM, radiusM: 800 }).forms) {
+        expect(one.flip?.becomes, one.form).not.toBe(one.status);
         if (one.flip?.fact === 'mainSpanM')
-          expect(form(guide({ spanM: one.flip.to, radiusM: 800 }), one.form).status, one.form).not.toBe(
-            one.status,
+          expect(form(guide({ spanM: one.flip.to, radiusM: 800 }), one.form).status, one.form).toBe(
+            one.flip.becomes,
           );
         if (one.flip?.fact === 'planRadiusM')
-          expect(form(guide({ spanM, radiusM: one.flip.to }), one.form).status, one.form).not.toBe(
-            one.status,
+          expect(form(guide({ spanM, radiusM: one.flip.to }), one.form).status, one.form).toBe(
+            one.flip.becomes,
           );
       }
   });

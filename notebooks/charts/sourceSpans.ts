@@ -101,42 +101,69 @@ export function sourceAxis(
   return [Math.min(5, askedM, ...ends), Math.max(askedM, ...ends) * 1.05];
 }
 
-/** Each source's span of each form, one line each, over the range that the rules take as usual. */
-export function sourceSpans(input: SourceSpansInput): Piece {
-  const { forms, askedM, widthPx } = input;
-  const ink = formInk(
-    input.paper ?? 'colour',
-    forms.map(({ form }) => form),
-    input.prefix ?? 'sources',
-  );
+const HEAD_PX = 32;
+
+/** Where everything stands, px. */
+function layoutOf({ forms, axisM, widthPx }: SourceSpansInput) {
   const narrow = widthPx < 680;
   const left = narrow ? 0 : Math.min(190, widthPx * 0.2);
   const right = narrow ? widthPx : widthPx * 0.64;
   const numberX = narrow ? 0 : right + 18;
   const wordsX = numberX + (narrow ? 22 : 26);
-  const scale = scaleLog(input.axisM, [left, right]);
-  const x = (m: number): number => scale(m);
-  const ticks = [5, 10, 20, 50, 100, 200, 500, 1000, 2000].filter(
-    (m) => m >= input.axisM[0] && m <= input.axisM[1] && (!narrow || m !== 10),
-  );
-  const head = 32;
+  const size = narrow ? letters.drawing : letters.table;
+  const scale = scaleLog(axisM, [left, right]);
   const words = forms.map(({ spans }) =>
     spans.map((span) => `${spanWords(span)}${span.of === undefined ? '' : `, ${span.of}`}`),
   );
-  const size = narrow ? letters.drawing : letters.table;
   const lineHeights = words.map((lines) =>
     lines.map((text) => (narrow ? 27 : Math.max(15, wrapText(text, widthPx - wordsX, size).length * 15))),
   );
   const rowHeights = lineHeights.map((lines) => lines.reduce((sum, one) => sum + one, narrow ? 42 : 14));
-  const tops = rowHeights.map((_, at) => head + rowHeights.slice(0, at).reduce((sum, one) => sum + one, 0));
-  const bottom = head + rowHeights.reduce((sum, one) => sum + one, 0);
+  const tops = rowHeights.map(
+    (_, at) => HEAD_PX + rowHeights.slice(0, at).reduce((sum, one) => sum + one, 0),
+  );
+  return {
+    narrow,
+    left,
+    numberX,
+    wordsX,
+    size,
+    x: (m: number): number => scale(m),
+    words,
+    lineHeights,
+    rowHeights,
+    tops,
+    bottom: HEAD_PX + rowHeights.reduce((sum, one) => sum + one, 0),
+  };
+}
+
+/** The asked span alone, to take the place of another in a chart of the same axis and width. */
+export function askedLine(input: SourceSpansInput): Piece {
+  const { x, bottom } = layoutOf(input);
+  const { accent } = formInk(input.paper ?? 'colour', [], '');
+  return limitLine(x(input.askedM), 2, bottom, `${length(input.askedM)} m asked`, accent, input.widthPx);
+}
+
+/** Each source's span of each form, one line each, over the range that the rules take as usual. */
+export function sourceSpans(input: SourceSpansInput): Piece {
+  const { forms, widthPx } = input;
+  const ink = formInk(
+    input.paper ?? 'colour',
+    forms.map(({ form }) => form),
+    input.prefix ?? 'sources',
+  );
+  const { narrow, left, numberX, wordsX, size, x, words, lineHeights, rowHeights, tops, bottom } =
+    layoutOf(input);
+  const ticks = [5, 10, 20, 50, 100, 200, 500, 1000, 2000].filter(
+    (m) => m >= input.axisM[0] && m <= input.axisM[1] && (!narrow || m !== 10),
+  );
 
   return sheet(widthPx, bottom + 20, 'What single sources say of the span of each form', [
     ink.defs.length > 0 && el('defs', {}, ink.defs),
     forms.map(({ form, usual }, index) =>
       el('rect', {
         x: x(usual[0]),
-        y: (tops[index] ?? head) + (narrow ? 25 : 4),
+        y: (tops[index] ?? HEAD_PX) + (narrow ? 25 : 4),
         width: x(usual[1]) - x(usual[0]),
         height: narrow ? 8 : (rowHeights[index] ?? 0) - 8,
         fill: ink.face(form),
@@ -144,16 +171,16 @@ export function sourceSpans(input: SourceSpansInput): Piece {
         'stroke-width': pens.fine,
       }),
     ),
-    gridUprights(ticks.map(x), head - 6, bottom),
+    gridUprights(ticks.map(x), HEAD_PX - 6, bottom),
     ticks.map((m) =>
-      label(x(m), head - 10, fixed(m, 0), {
+      label(x(m), HEAD_PX - 10, fixed(m, 0), {
         anchor: narrow && x(m) < 10 ? 'start' : 'middle',
         fill: colours.second,
       }),
     ),
-    limitLine(x(askedM), 2, bottom, `${length(askedM)} m asked`, ink.accent, widthPx),
+    askedLine(input),
     forms.map(({ form, spans }, index) => {
-      const top = tops[index] ?? head;
+      const top = tops[index] ?? HEAD_PX;
       const heights = lineHeights[index] ?? [];
       const before = forms[index - 1];
       return g(

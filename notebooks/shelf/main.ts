@@ -1,112 +1,224 @@
 import example from '../../data/examples/low-ferry.json';
-import { readStudy, writeStudy } from '../../lib/index.ts';
+import {
+  parseStudy,
+  readStudy,
+  sentence,
+  survey,
+  writeStudy,
+  type Site,
+  type Study,
+} from '../../lib/index.ts';
+import { scaleBar } from '../drawing/scaleBar.ts';
+import { sheet as drawingSheet } from '../drawing/sheet.ts';
+import { countWords, fixed, listed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
-import { deviceCupboard, savedWords, sheet, studyShelf, type StudyEntry } from '../page/index.ts';
+import {
+  deviceCupboard,
+  openFile,
+  pagesFrom,
+  sheet,
+  studyShelf,
+  type StoredStudy,
+  type StudyCupboard,
+} from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
+import { keptStudies, type KeptStudy } from './kept.ts';
+import { smallCrossing } from './smallCrossing.ts';
+import { studyHref, studyList } from './studyList.ts';
 
-/** Studies kept on this device, newest first; empty where the browser keeps nothing. */
-async function studies(): Promise<readonly StudyEntry[]> {
-  const cupboard = await deviceCupboard().catch(() => null);
-  return cupboard ? studyShelf(cupboard, { readStudy, writeStudy }, () => new Date()).list() : [];
+/** Scale at which worked examples are drawn. */
+const EXAMPLE_SCALE = 2500;
+
+function workedExample(): { readonly study: Study; readonly site: Site } {
+  const parsed = parseStudy(example);
+  if (!parsed.ok) throw new Error(parsed.problems.map(sentence).join(' '));
+  return { study: parsed.value, site: survey(parsed.value.brief) };
 }
 
-function studyTable(rows: readonly StudyEntry[]): HtmlChild {
-  if (rows.length === 0)
-    return h(
-      'p',
-      { class: 'prose' },
-      'No study has been saved on this device yet. A worked example becomes yours with the first change.',
-    );
-  return h(
-    'table',
-    {},
-    h(
-      'thead',
-      {},
-      h(
-        'tr',
-        {},
-        ['study', 'reference', 'saved'].map((word) => h('th', { scope: 'col' }, word)),
-      ),
-    ),
-    h(
-      'tbody',
-      {},
-      rows.map(({ id, title, reference, savedAt }) =>
-        h(
-          'tr',
-          {},
-          h(
-            'th',
-            { scope: 'row' },
-            h('a', { href: `./option-study.html?study=${encodeURIComponent(id)}` }, title),
-          ),
-          h('td', { class: 'text' }, reference),
-          h('td', { class: 'text' }, `${savedAt.slice(0, 10)}, ${savedWords(savedAt)}`),
-        ),
-      ),
-    ),
+/** 'A railway and a river in 230 m; no pier may stand in 60 m of it.' */
+function exampleWords({ zones, lengthM, mainOpening }: Site): string {
+  const kinds = listed([...new Set(zones.map(({ kind }) => `a ${kind}`))]);
+  const barred = mainOpening === null ? '' : `; no pier may stand in ${fixed(mainOpening.widthM, 0)} m of it`;
+  return `${kinds.charAt(0).toUpperCase()}${kinds.slice(1)} in ${fixed(lengthM, 0)} m${barred}.`;
+}
+
+const answerWords = (kept: readonly KeptStudy[]): string => {
+  const count = countWords(kept.length);
+  const lie = kept.length === 0 ? 'yet' : 'and nowhere else';
+  return `${count.charAt(0).toUpperCase()}${count.slice(1)} ${kept.length < 2 ? 'study lies' : 'studies lie'} on this device ${lie}. A worked example shows what comes out: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.`;
+};
+
+function nextWords(kept: readonly KeptStudy[]): HtmlChild {
+  const newest = kept.find(({ read }) => read.ok);
+  return newest === undefined
+    ? h('a', { href: './option-study.html' }, 'open the worked example')
+    : [
+        'open ',
+        h('a', { href: studyHref(newest.stored.id) }, newest.stored.title),
+        ', the last that was changed',
+      ];
+}
+
+async function start(): Promise<void> {
+  const cupboard: StudyCupboard | null = await deviceCupboard().catch(() => null);
+  const graph = newGraph();
+  const page = sheet(graph);
+  /** Counts what was done to the studies, so that they are read again. */
+  const turn = graph.input('turn', 0);
+  const removed = graph.input<StoredStudy | null>('removed', null);
+  const kept = graph.slow(
+    'studies',
+    { turn },
+    (): Promise<readonly KeptStudy[]> => (cupboard === null ? Promise.resolve([]) : keptStudies(cupboard)),
+    { policy: 'latest' },
   );
+  let turns = 0;
+  const after = async (work: Promise<void>, now: StoredStudy | null): Promise<void> => {
+    await work;
+    turns += 1;
+    graph.batch(() => {
+      graph.set(removed, now);
+      graph.set(turn, turns);
+    });
+  };
+
+  const said = h('span', { class: 'state', role: 'status' });
+  if (cupboard === null)
+    said.textContent = 'This browser keeps no studies; open and save them as files in the option study.';
+  const open = async (): Promise<void> => {
+    const text = await openFile();
+    if (text === null || cupboard === null) return;
+    const read = readStudy(text);
+    const id = crypto.randomUUID();
+    const saved = read.ok
+      ? await studyShelf(cupboard, { readStudy, writeStudy }, () => new Date()).save(id, read.value, 0)
+      : read;
+    if (saved.ok) location.assign(studyHref(id));
+    else said.textContent = `Not opened. ${saved.problems.map(sentence).join(' ')}`;
+  };
+
+  const { study, site } = workedExample();
+  page.mount(document.body, {
+    bar: {
+      pages: pagesFrom('shelf'),
+      tools: [
+        said,
+        h(
+          'button',
+          { type: 'button', class: 'action', disabled: cupboard === null, onclick: () => void open() },
+          'Open a file',
+        ),
+        h('button', { type: 'button', class: 'action', onclick: () => print() }, 'Print'),
+      ],
+    },
+    head: {
+      title: 'Shelf',
+      answer: page.live({ kept }, (v) => answerWords(v.kept)),
+      next: page.live({ kept }, (v) => nextWords(v.kept)),
+    },
+    hint: false,
+    sections: [
+      page.section(1, 'Studies', 'Newest first, on this device only; nothing leaves it.', [
+        page.cell({
+          station: '1+010',
+          title: 'Studies on this device',
+          shows: { kept, removed },
+          owns: [kept, removed],
+          wide: true,
+          long: true,
+          body: (v, room) =>
+            studyList({
+              kept: v.kept,
+              removed: v.removed,
+              now: new Date(),
+              widthPx: room.widthPx,
+              remove: (one) => void after(cupboard!.remove(one.id), one),
+              putBack: (one) =>
+                void after(
+                  cupboard!.change(one.id, () => one),
+                  null,
+                ),
+            }),
+          notes: [
+            h(
+              'p',
+              {},
+              'Saved as you type. A browser can lose what it keeps: save what matters as a file; the file holds the whole study and opens on any device.',
+            ),
+          ],
+        }),
+      ]),
+      page.section(
+        2,
+        'Worked example',
+        'Complete and invented; the first change makes it a study of your own.',
+        [
+          page.cell({
+            station: '2+010',
+            title: 'Worked example',
+            shows: {},
+            body: h(
+              'div',
+              { class: 'example' },
+              h('p', {}, h('a', { class: 'title', href: './option-study.html' }, study.title)),
+              h('p', { class: 'small' }, exampleWords(site)),
+              h('div', { class: 'pushed' }, smallCrossing(site, EXAMPLE_SCALE, 'example')),
+              drawingSheet(360, 44, `Scale bar, 1 to ${String(EXAMPLE_SCALE)}`, [
+                scaleBar(EXAMPLE_SCALE, 14, 18, { widthPx: 200, rightPx: 340 }),
+              ]),
+            ),
+            notes: [h('p', {}, example.notice)],
+          }),
+        ],
+      ),
+      page.section(3, 'What it is for, and what it is not', null, [
+        page.cell({
+          station: '3+010',
+          title: 'What it is for',
+          shows: {},
+          body: [
+            h(
+              'p',
+              {},
+              'For the days in which a crossing has a budget and no ground investigation: which structural form, at which spans and depth, deserves to be taken forward; what it needs in concrete, steel and tendons; what it costs and how sure that is; why the others were dropped, and what would change the answer.',
+            ),
+            h(
+              'dl',
+              { class: 'remarks' },
+              h('dt', {}, h('a', { href: './option-study.html' }, 'Option study')),
+              h(
+                'dd',
+                {},
+                'a crossing from its brief to a ranking under the budget, every figure with its rule and source.',
+              ),
+              h('dt', {}, h('a', { href: './span-chart.html' }, 'Span chart')),
+              h(
+                'dd',
+                {},
+                'one opening, no study: which forms reach it, how deep they are, where sources disagree, what has been built.',
+              ),
+            ),
+            h(
+              'p',
+              {},
+              'It works without a network and without an account. Unknown is an answer wherever it is true, and makes the result wider.',
+            ),
+          ],
+        }),
+        page.cell({
+          station: '3+020',
+          title: 'Cautions',
+          shows: {},
+          body: h(
+            'p',
+            { class: 'caution prose' },
+            h('b', {}, 'Option stage only; not a design and not for construction.'),
+            ' Sizes are quick checks, not code verification. Temporary works and stability while launching, lifting and cantilevering need their own design: box girders have failed in erection. Ground, flood, scour, vessel impact and seismic matters need specialists. Clearances and loads are presets to be confirmed with the authority. A licensed engineer and the local codes decide. All rates shipped with the tool are invented.',
+          ),
+        }),
+      ]),
+    ],
+  });
 }
 
-const graph = newGraph();
-const kept = graph.slow('studies', {}, studies, { policy: 'latest' });
-const page = sheet(graph);
-page.mount(document.body, {
-  bar: {
-    pages: [
-      { words: 'Spanledger', href: './index.html', here: true },
-      { words: 'Option study', href: './option-study.html' },
-    ],
-  },
-  head: {
-    title: 'Shelf',
-    answer:
-      'A notebook for option studies of bridges: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.',
-    next: h('a', { href: './option-study.html' }, 'open the worked example'),
-  },
-  sections: [
-    page.section(1, 'Studies', 'On this device only; nothing leaves it.', [
-      page.cell({
-        station: '1+010',
-        title: 'Studies on this device',
-        shows: { kept },
-        owns: [kept],
-        body: (v) => studyTable(v.kept),
-        notes: [
-          h(
-            'p',
-            {},
-            'Saved as you type. A study can be saved as a file from its page and opened there again.',
-          ),
-        ],
-      }),
-    ]),
-    page.section(2, 'Worked example', 'Invented, and says so.', [
-      page.cell({
-        station: '2+010',
-        title: 'Worked example',
-        shows: {},
-        body: h(
-          'div',
-          { class: 'prose' },
-          h('p', {}, h('a', { href: './option-study.html' }, example.title)),
-          h('p', {}, example.notice),
-        ),
-      }),
-    ]),
-    page.section(3, 'Cautions', null, [
-      page.cell({
-        station: '3+010',
-        title: 'Cautions',
-        shows: {},
-        body: h(
-          'p',
-          { class: 'caution prose' },
-          h('b', {}, 'Option stage only; not a design and not for construction.'),
-          ' Sizes are quick checks, not code verification. Temporary works and stability during erection need their own design. Ground, flood, scour, vessel impact and seismic matters need specialists. Clearances and loads are presets to be confirmed with the authority. A licensed engineer and the local codes decide. All rates shipped with the tool are invented.',
-        ),
-      }),
-    ]),
-  ],
-});
+void start();

@@ -1,4 +1,4 @@
-import { builtBucket, builtShares, builtSpans, formIds } from '../../lib/index.ts';
+import { builtShares, builtSpans, formIds } from '../../lib/index.ts';
 import { shareColumns, shareTable, type ShareColumnsInput } from '../charts/shareColumns.ts';
 import { tableBehind, tablePiece } from '../charts/table.ts';
 import { fixed, length } from '../format.ts';
@@ -11,7 +11,7 @@ import { builtWords } from './words.ts';
 /** What stands behind the grey lines: how the record counts each form. */
 const counted = tablePiece({
   caption: 'Main spans behind the grey lines of 1+020, m',
-  head: ['form', 'bridges', '5 %', '50 %', '95 %', 'counted as', ''],
+  head: ['form', 'bridges', '5 %', '50 %', '95 %', 'counted as', 'what that holds'],
   rows: formIds.flatMap((form) => {
     const built = builtSpans(form);
     return built === null
@@ -32,18 +32,19 @@ const counted = tablePiece({
 
 /** Section 4: what was built at such spans. */
 export function builtSection(page: Sheet, cells: AnswerCells): LineSection {
-  const { answer } = cells;
-  const finding = page.live({ answer }, (v) => builtWords(v.answer.span, builtBucket(v.answer.span)));
+  const { bucket } = cells;
+  const finding = page.live({ bucket }, (v) => builtWords(v.bucket));
   return page.section(4, 'What has been built', finding, [
     page.cell({
       station: '4+010',
       title: 'What was built at like spans',
-      shows: { answer },
+      shows: { bucket },
+      owns: [bucket],
       wide: true,
       body: (v, room) => {
         const input: ShareColumnsInput = {
           ...builtShares,
-          asked: builtBucket(v.answer.span),
+          asked: v.bucket,
           widthPx: room.widthPx,
           prefix: 'shares',
         };
@@ -72,7 +73,11 @@ export function builtSection(page: Sheet, cells: AnswerCells): LineSection {
       title: 'How the record counts',
       shows: {},
       wide: true,
-      body: h('div', { class: 'across words-last' }, counted),
+      body: h(
+        'div',
+        { class: 'across words-last', tabindex: 0, role: 'region', 'aria-label': 'How the record counts' },
+        counted,
+      ),
     }),
   ]);
 }

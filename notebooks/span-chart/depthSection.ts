@@ -1,14 +1,14 @@
-import { depthGuidance, formIds, type FormId, type GuideForm } from '../../lib/index.ts';
+import { depthGuidance, type FormId, type GuideForm } from '../../lib/index.ts';
 import { depthBands, depthTable, type DepthBandRow, type DepthBandsInput } from '../charts/depthBands.ts';
 import { tableBehind } from '../charts/table.ts';
-import { length } from '../format.ts';
+import { countWords, length } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
 import { orderOf, type AnswerCells } from './answerCells.ts';
 import { taskOf, type Question } from './question.ts';
 import { referenceTo } from './references.ts';
-import { countWords, ratioWords } from './words.ts';
+import { ratioWords } from './words.ts';
 
 /** Bands that measure what stands under the road at midspan. */
 const underRoad: ReadonlySet<string> = new Set(['depth', 'midspan depth', 'floor depth']);
@@ -35,18 +35,9 @@ function bandsOf(form: FormId, question: Question, { depthM }: GuideForm): reado
   });
 }
 
-/** What published notes add to the bands, by form, in family order. */
-function notesOn(forms: readonly FormId[], question: Question): readonly { form: FormId; note: string }[] {
-  return formIds.flatMap((form) => {
-    if (!forms.includes(form)) return [];
-    const notes = new Set(depthGuidance(form, taskOf(question)).flatMap(({ note }) => note ?? []));
-    return notes.size === 0 ? [] : [{ form, note: [...notes].join(' ') }];
-  });
-}
-
 /** Section 2: how deep each form that reaches is at the asked span. */
 export function depthSection(page: Sheet, cells: AnswerCells): LineSection {
-  const { asked, answer, order } = cells;
+  const { asked, answer, order, remarks } = cells;
   const finding = page.live({ asked, answer }, (v) => {
     const reaching = v.answer.forms.filter(({ status }) => status !== 'out');
     const depths = reaching.map(({ depthM }) => depthM.midspan);
@@ -94,19 +85,15 @@ export function depthSection(page: Sheet, cells: AnswerCells): LineSection {
     page.cell({
       station: '2+020',
       title: 'Where depths disagree',
-      shows: { asked, answer },
-      body: (v) => {
-        const notes = notesOn(
-          reachingIn(v).map(({ form }) => form),
-          v.asked,
-        );
-        if (notes.length === 0) return h('p', { class: 'prose' }, 'Nothing is noted beside these bands.');
-        return h(
-          'dl',
-          { class: 'remarks' },
-          notes.map(({ form, note }) => [h('dt', {}, formLooks[form].short), h('dd', {}, note)]),
-        );
-      },
+      shows: { remarks },
+      body: (v) =>
+        v.remarks.length === 0
+          ? h('p', { class: 'prose' }, 'Nothing is noted beside these bands.')
+          : h(
+              'dl',
+              { class: 'remarks' },
+              v.remarks.map(({ form, note }) => [h('dt', {}, formLooks[form].short), h('dd', {}, note)]),
+            ),
     }),
   ]);
 }

@@ -1,8 +1,17 @@
 import { familyOf, formIds, spanSources, spanWindow, type Family } from '../../lib/index.ts';
-import { sourceAxis, sourceSpans, sourceSpansTable, type SourceSpansInput } from '../charts/sourceSpans.ts';
+import {
+  askedLine,
+  sourceAxis,
+  sourceSpans,
+  sourceSpansTable,
+  type SourceSpansInput,
+} from '../charts/sourceSpans.ts';
 import { tableBehind } from '../charts/table.ts';
+import { el } from '../drawing/piece.ts';
+import { toDom } from '../drawing/toDom.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
+import type { Graph } from '../reactive/index.ts';
 import type { AnswerCells } from './answerCells.ts';
 import { referenceTo } from './references.ts';
 
@@ -25,9 +34,23 @@ const together: readonly (readonly Family[])[] = [
 ];
 const parts = together.map((names) => forms.filter(({ form }) => names.includes(familyOf[form])));
 
-/** Section 3: each source's span of each form, beside the others. */
-export function disagreementSection(page: Sheet, cells: AnswerCells): LineSection {
-  const { answer } = cells;
+/** The asked span as an element for a chart that stands. */
+const lineOf = (input: SourceSpansInput): Element =>
+  toDom(el('svg', {}, askedLine(input)), document).firstElementChild!;
+
+/** Section 3: each source's span of each form, beside the others. The charts stand; only the asked span moves in them. */
+export function disagreementSection(page: Sheet, graph: Graph, cells: AnswerCells): LineSection {
+  const axis = graph.cell('sourceAxis', { answer: cells.answer }, (v) => sourceAxis(forms, v.answer.span), {
+    equal: (a, b) => a[0] === b[0] && a[1] === b[1],
+  });
+  let askedM = Number.NaN;
+  let drawn: readonly { readonly input: SourceSpansInput; readonly element: Element }[] = [];
+  graph.watch(cells.answer, (state) => {
+    if (state.state !== 'ready') return;
+    askedM = state.value.span;
+    for (const { input, element } of drawn)
+      element.querySelector('.limit')?.replaceWith(lineOf({ ...input, askedM }));
+  });
   return page.section(
     3,
     'Where sources disagree',
@@ -36,21 +59,23 @@ export function disagreementSection(page: Sheet, cells: AnswerCells): LineSectio
       page.cell({
         station: '3+010',
         title: 'What single sources say',
-        shows: { answer },
+        shows: { axis },
         wide: true,
         long: true,
         body: (v, room) => {
-          const input: SourceSpansInput = {
-            forms,
-            askedM: v.answer.span,
-            axisM: sourceAxis(forms, v.answer.span),
-            widthPx: room.widthPx,
-          };
+          drawn = parts.map((part, index) => {
+            const input = {
+              forms: part,
+              askedM,
+              axisM: v.axis,
+              widthPx: room.widthPx,
+              prefix: `sources-${String(index)}`,
+            };
+            return { input, element: toDom(sourceSpans(input), document) };
+          });
           return [
-            parts.map((part, index) =>
-              sourceSpans({ ...input, forms: part, prefix: `sources-${String(index)}` }),
-            ),
-            tableBehind(sourceSpansTable(input)),
+            drawn.map(({ element }) => element),
+            tableBehind(sourceSpansTable({ forms, askedM, axisM: v.axis, widthPx: room.widthPx })),
           ];
         },
         notes: [

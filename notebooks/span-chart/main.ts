@@ -62,7 +62,7 @@ page.mount(document.body, {
   sections: [
     spanSection(page, graph, cells),
     depthSection(page, cells),
-    disagreementSection(page, cells),
+    disagreementSection(page, graph, cells),
     builtSection(page, cells),
     sourceSection(page),
   ],

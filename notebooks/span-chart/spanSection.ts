@@ -1,12 +1,12 @@
 import { spanAxis, spanChart, spanTable, type SpanChartInput } from '../charts/spanChart.ts';
 import { spanRows } from '../charts/spanRows.ts';
 import { tableBehind } from '../charts/table.ts';
-import { length } from '../format.ts';
+import { countWords, length } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import { choiceInput, type LineSection, type Sheet } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import { orderOf, type AnswerCells, type Order } from './answerCells.ts';
-import { countWords, firstTurnWords } from './words.ts';
+import { firstTurnWords } from './words.ts';
 
 /** Narrower than this, forms that are out are folded away. */
 const FOLD_PX = 680;

@@ -7,27 +7,8 @@ import {
   type Status,
 } from '../../lib/index.ts';
 import { flipWords } from '../charts/spanRows.ts';
-import { fixed, length, listed, plain } from '../format.ts';
+import { countWords, fixed, listed, plain } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
-
-const small = [
-  'no',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-];
-
-/** A count in words up to twelve, in figures beyond. */
-export const countWords = (count: number): string => small[count] ?? String(count);
 
 const capital = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
 
@@ -72,8 +53,8 @@ export function ratioWords({ ratio, of, method, leastM }: DepthGuidance): string
 }
 
 /** What was built at a span, the two forms most often, in a sentence. */
-export function builtWords(spanM: number, bucket: BuiltBucket | null): string {
-  if (bucket === null) return `Beyond 500 m too few were built to count; ${length(spanM)} m is asked.`;
+export function builtWords(bucket: BuiltBucket | null): string {
+  if (bucket === null) return 'Beyond 500 m too few were built to count.';
   const first = builtShares.classes
     .map(({ id, words }) => ({
       words,

@@ -19,6 +19,22 @@ describe('guide on the command line', () => {
     expect(answer.forms).toHaveLength(17);
     expect(Object.keys(answer.forms[0]!.depthM)).toEqual(['support', 'midspan']);
   });
+  it('gives every form its status, depths, reasons and sources, best first, and what turns it', () => {
+    const { forms } = JSON.parse(run('--span 120 --width 12').stdout) as {
+      forms: Record<string, unknown>[];
+    };
+    const ranks = forms.map(({ status }) => ['in', 'possible', 'out'].indexOf(String(status)));
+    expect(ranks).toEqual([...ranks].sort());
+    expect(ranks[0]).toBe(0);
+    for (const { flip, ...form } of forms) {
+      expect(Object.keys(form)).toEqual(['form', 'status', 'depthM', 'because', 'sources']);
+      expect(form['because']).toEqual(expect.arrayContaining([expect.any(String)]));
+      expect(form['sources']).toEqual(expect.arrayContaining([expect.any(String)]));
+      if (flip === undefined) continue;
+      expect(Object.keys(flip as object)).toEqual(['fact', 'from', 'to', 'unit', 'becomes']);
+      expect((flip as { becomes: string }).becomes).not.toBe(form['status']);
+    }
+  });
   it.each([
     ['--span -3', /span: expected more than 0 m, received -3 m \(--span\)/],
     ['--span 100 --length 50', /length: expected at least the span of 100 m, received 50 m \(--length\)/],

@@ -28,6 +28,7 @@ import { formLooks } from '../../notebooks/forms/formLook.ts';
 import { glyph } from '../../notebooks/forms/glyph.ts';
 import { hatchId, hatches } from '../../notebooks/forms/hatch.ts';
 import { optionNumber } from '../../notebooks/forms/optionNumber.ts';
+import { smallCrossing } from '../../notebooks/shelf/smallCrossing.ts';
 import { formIds } from '../../lib/model/index.ts';
 import {
   checks,
@@ -84,6 +85,7 @@ export const sheets: Readonly<Record<string, () => Piece>> = {
   crossing: () => crossing({ site, option: second, obstacles, widthPx: 980 }),
   'crossing-handles': () =>
     crossing({ site, option: second, obstacles, widthPx: 980, handles: true, band: false }),
+  'crossing-shelf': () => smallCrossing(site, 2500, 'shelf'),
   'crossing-bare': () => crossing({ site, option: null, obstacles, widthPx: 980 }),
   'crossing-small': () => crossing({ site, option: second, obstacles, widthPx: 358 }),
   'crossing-window': () =>

@@ -5,13 +5,7 @@ import { guide } from '../../lib/guide.ts';
 import { formIds } from '../../lib/model/index.ts';
 import { flipWords, spanRows } from '../../notebooks/charts/spanRows.ts';
 import { knownWords, references, referenceTo } from '../../notebooks/span-chart/references.ts';
-import {
-  answerWords,
-  builtWords,
-  countWords,
-  firstTurnWords,
-  ratioWords,
-} from '../../notebooks/span-chart/words.ts';
+import { answerWords, builtWords, firstTurnWords, ratioWords } from '../../notebooks/span-chart/words.ts';
 
 describe('flipWords({flip})', () => {
   const flip = (fact: string, from: number, to: number, becomes: 'in' | 'possible' | 'out') =>
@@ -78,14 +72,11 @@ describe('words of the page', () => {
     );
   });
   it('builtWords names the two most built, leaves doubted shares out, and is honest beyond the record', () => {
-    expect(builtWords(63, builtBucket(63))).toBe(
+    expect(builtWords(builtBucket(63))).toBe(
       'Of 3\u2009114 bridges with a longest span of 50 to 75 m: 62 % steel I-girder and 16 % prestressed box.',
     );
-    expect(builtWords(180, builtBucket(180))).toMatch(/19 % steel arch and 17 % steel truss/u);
-    expect(builtWords(700, builtBucket(700))).toMatch(/^Beyond 500 m too few/u);
-  });
-  it('countWords writes small counts as words', () => {
-    expect([0, 1, 12, 13].map(countWords)).toEqual(['no', 'one', 'twelve', '13']);
+    expect(builtWords(builtBucket(180))).toMatch(/19 % steel arch and 17 % steel truss/u);
+    expect(builtWords(builtBucket(700))).toMatch(/^Beyond 500 m too few/u);
   });
 });
 

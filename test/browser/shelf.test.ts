@@ -1,0 +1,107 @@
+import { readFile } from 'node:fs/promises';
+import { resolve } from 'node:path';
+import type { Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { openSite, type Heard, type Site } from './site.ts';
+
+const example = resolve(import.meta.dirname, '../../data/examples/low-ferry.json');
+
+let site: Site;
+beforeAll(async () => {
+  site = await openSite();
+});
+afterAll(() => site.close());
+
+const silent = (heard: Heard): void => {
+  expect(heard.console).toEqual([]);
+  expect(heard.elsewhere).toEqual([]);
+};
+const rows = (page: Page): Promise<string[]> => page.locator('.study .title').allTextContents();
+
+/** Opens a file from the shelf and comes back to the shelf. */
+async function bring(page: Page, title: string): Promise<void> {
+  const study = JSON.parse(await readFile(example, 'utf8')) as object;
+  const chooser = page.waitForEvent('filechooser');
+  await page.getByRole('button', { name: 'Open a file' }).click();
+  await (
+    await chooser
+  ).setFiles({
+    name: 'study.json',
+    mimeType: 'application/json',
+    buffer: Buffer.from(JSON.stringify({ ...study, title })),
+  });
+  await page.waitForURL(/option-study\.html\?study=/u);
+  await page.goto(new URL('index.html', site.address).href);
+  await page.locator('.study').first().waitFor();
+}
+
+describe('shelf', () => {
+  it('without a study shows the worked example with its crossing, the cautions and the way on', async () => {
+    const { page, heard } = await site.open('index.html');
+    await page.getByText('No study lies here yet').waitFor();
+    expect(await page.locator('.answer').innerText()).toMatch(/^No study lies on this device yet/u);
+    const scale = page.locator('[id="2+010"] .elevation');
+    expect(await scale.getAttribute('data-scale')).toBe('2500');
+    expect(await page.locator('body').innerText()).toContain('not for construction');
+    expect(await page.getByRole('link', { name: 'open the worked example' }).getAttribute('href')).toBe(
+      './option-study.html',
+    );
+    silent(heard);
+  });
+
+  it('names the pages the same everywhere', async () => {
+    const { page, heard } = await site.open('index.html');
+    const names = async (): Promise<string[]> => page.locator('nav .bar > a').allTextContents();
+    for (const [name, title] of [
+      ['Span chart', 'Span chart'],
+      ['Shelf', 'Shelf'],
+      ['Option study', 'River Wend crossing at Low Ferry'],
+    ] as const) {
+      await page.getByRole('link', { name, exact: true }).first().click();
+      await page.getByRole('heading', { level: 1, name: title }).waitFor();
+      expect(await names()).toEqual(['Shelf', 'Option study', 'Span chart']);
+      expect(await page.locator('nav [aria-current=page]').allTextContents()).toEqual([name]);
+    }
+    silent(heard);
+  });
+
+  it('a study from a file lies on the shelf, can be removed and put back, and saved as a file again', async () => {
+    const { page, heard } = await site.open('index.html');
+    await page.getByText('No study lies here yet').waitFor();
+    await bring(page, 'Mill Lane over the bypass');
+    await bring(page, 'Kelder viaduct');
+    expect(await rows(page)).toEqual(['Kelder viaduct', 'Mill Lane over the bypass']);
+    expect(await page.locator('.next').innerText()).toContain('open Kelder viaduct');
+    expect(await page.locator('.study .elevation').first().getAttribute('data-scale')).toBe('5000');
+
+    await page.getByRole('button', { name: 'Remove Kelder viaduct' }).click();
+    await page.getByText('Kelder viaduct has been removed').waitFor();
+    expect(await rows(page)).toEqual(['Mill Lane over the bypass']);
+    await page.getByRole('button', { name: 'Put Kelder viaduct back' }).click();
+    await page.waitForFunction(() => document.querySelectorAll('.study').length === 2);
+    expect(await page.getByText('has been removed').count()).toBe(0);
+
+    const saving = page.waitForEvent('download');
+    await page.getByRole('button', { name: 'Save Kelder viaduct as a file' }).click();
+    const file = await saving;
+    expect(file.suggestedFilename()).toBe('wen-07-kelder-viaduct.spanledger.json');
+    expect(JSON.parse(await readFile(await file.path(), 'utf8'))).toMatchObject({ title: 'Kelder viaduct' });
+    silent(heard);
+  });
+
+  it('a file that is no study is refused with the reason and nothing is kept', async () => {
+    const { page, heard } = await site.open('index.html');
+    await page.getByText('No study lies here yet').waitFor();
+    const chooser = page.waitForEvent('filechooser');
+    await page.getByRole('button', { name: 'Open a file' }).click();
+    await (
+      await chooser
+    ).setFiles({ name: 'x.json', mimeType: 'application/json', buffer: Buffer.from('{"a":') });
+    await page.waitForFunction(() =>
+      document.querySelector('nav .state')?.textContent.startsWith('Not opened.'),
+    );
+    await page.reload();
+    await page.getByText('No study lies here yet').waitFor();
+    silent(heard);
+  });
+});

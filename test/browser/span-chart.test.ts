@@ -1,0 +1,190 @@
+import type { Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { openSite, type Heard, type Site } from './site.ts';
+
+let site: Site;
+beforeAll(async () => {
+  site = await openSite();
+});
+afterAll(() => site.close());
+
+const silent = (heard: Heard): void => {
+  expect(heard.console).toEqual([]);
+  expect(heard.elsewhere).toEqual([]);
+};
+
+/** Waits until every cell is drawn. */
+const settled = (page: Page): Promise<unknown> =>
+  page.waitForFunction(() => {
+    const cells = [...document.querySelectorAll('.cell')];
+    return cells.length > 0 && cells.every((cell) => cell.getAttribute('data-state') === 'done');
+  });
+
+/** Types a figure into the field of that name and leaves it with Enter. */
+async function type(page: Page, name: string, value: string): Promise<void> {
+  const field = page.getByRole('spinbutton', { name });
+  await field.focus();
+  await page.keyboard.press('Control+a');
+  await page.keyboard.type(value);
+  await page.keyboard.press('Enter');
+}
+
+const answer = (page: Page): Promise<string> => page.locator('.answer').innerText();
+/** Words of a form's row in the first chart. */
+const rowOf = (page: Page, form: string): Promise<string> =>
+  page
+    .locator('[id="1+020"] g.form')
+    .filter({ hasText: form })
+    .evaluate((row) => [...row.querySelectorAll('text')].map((text) => text.textContent).join(' | '));
+const said = (page: Page, place: string, words: string): Promise<unknown> =>
+  page.waitForFunction(
+    ([where, what]) => document.querySelector(where!)?.textContent.includes(what!),
+    [place, words],
+  );
+
+describe('span chart', () => {
+  it('opens with an answer for 60 m, seventeen forms, and says nothing', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    expect(await answer(page)).toContain('asks for 63 m');
+    expect(await answer(page)).toContain('Composite box, composite I and cantilever-built box are in');
+    expect(await page.locator('[id="1+020"] g.form').count()).toBe(17);
+    expect(await rowOf(page, 'Precast I')).toMatch(
+      /out \| needs 63.m; precast I in one piece stops at 50.m/u,
+    );
+    expect(await page.locator('[id="5+010"] li').count()).toBeGreaterThan(30);
+    expect(await page.locator('body').innerText()).toContain('not for construction');
+    silent(heard);
+  });
+
+  it('another opening changes the answer, the standings, the depths and what was built', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    const depths = await page.locator('[id="2+010"]').innerText();
+    await type(page, 'clear opening', '217');
+    await said(page, '.answer', 'asks for 220 m');
+    await said(page, '#s4 .finding', '200 to 300 m');
+    expect(await answer(page)).toMatch(/Cable-stayed, truss, .* are in/u);
+    expect(await rowOf(page, 'Cable-stayed')).toContain('| in |');
+    // The charts of the sources stand, and the asked span moves in each.
+    const asked = page.locator('[id="3+010"] .limit text');
+    expect(await asked.allTextContents()).toEqual(['220 m asked', '220 m asked', '220 m asked']);
+    for (const line of await asked.all()) expect((await line.boundingBox())?.width).toBeGreaterThan(20);
+    expect(await rowOf(page, 'Composite I')).toContain('| out |');
+    expect(await page.locator('[id="2+010"]').innerText()).not.toBe(depths);
+    silent(heard);
+  });
+
+  it('a tight curve puts straight forms out and says the radius', async () => {
+    const { page, heard } = await site.open('span-chart.html?opening=177&radius=600');
+    await settled(page);
+    expect(await rowOf(page, 'Truss')).toContain('| possible |');
+    await type(page, 'plan radius', '250');
+    await page.waitForFunction(() =>
+      [...document.querySelectorAll('[id="1+020"] g.form')].some((row) =>
+        row.textContent.includes('a straight truss cannot carry a road tighter than 300'),
+      ),
+    );
+    expect(await rowOf(page, 'Truss')).toContain('| out |');
+    silent(heard);
+  });
+
+  it('the road becomes straight or curved by choice, and the radius comes and goes with it', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    const radius = page.getByRole('spinbutton', { name: 'plan radius' });
+    expect(await radius.isVisible()).toBe(false);
+    await page.getByRole('combobox', { name: 'line of the road' }).selectOption('curved');
+    expect(await radius.isVisible()).toBe(true);
+    await said(page, '.block', 'radius 500 m');
+    await page.getByRole('combobox', { name: 'line of the road' }).selectOption('straight');
+    await said(page, '.block', 'straight');
+    silent(heard);
+  });
+
+  it('forms are listed by fit on request, the best first, and the choice keeps the focus', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    const first = (): Promise<string> =>
+      page
+        .locator('[id="1+020"] g.form text')
+        .first()
+        .evaluate((text) => text.textContent);
+    expect(await first()).toBe('Slab');
+    const order = page.getByRole('combobox', { name: 'order of the forms' });
+    await order.focus();
+    await order.selectOption('fit');
+    await page.waitForFunction(
+      () => document.querySelector('[id="1+020"] g.form text')?.textContent === 'Composite box',
+    );
+    expect(await order.evaluate((field) => field === document.activeElement)).toBe(true);
+    silent(heard);
+  });
+
+  it('a length shorter than the opening is refused beside it and the last answer is kept', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    await type(page, 'length between abutments', '40');
+    await page.getByText('both abutments stand outside the opening').waitFor();
+    expect(await answer(page)).toContain('asks for 63 m');
+    await page.getByRole('button', { name: 'Take 60' }).click();
+    await said(page, '.answer', 'asks for 60 m');
+    expect(await page.getByText('both abutments stand outside the opening').count()).toBe(0);
+    silent(heard);
+  });
+
+  it('a question can be kept as an address, and a bad one is answered with what was wrong', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    await type(page, 'clear opening', '90');
+    await type(page, 'length between abutments', '300');
+    await page.waitForFunction(() => location.search.includes('length=300'));
+    await page.reload();
+    await settled(page);
+    expect(await answer(page)).toContain('asks for 93 m');
+    await page.goto(new URL('span-chart.html?opening=lots', site.address).href);
+    await settled(page);
+    expect(await page.locator('nav .state').innerText()).toContain("received 'lots'");
+    expect(await answer(page)).toContain('asks for 63 m');
+    silent(heard);
+  });
+
+  it('on a hand-held screen forms that are out are folded, nothing runs off, and unfolding stays', async () => {
+    const { page, heard } = await site.open('span-chart.html', { width: 400, height: 800 });
+    await settled(page);
+    expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(400);
+    const fold = page.locator('.folded');
+    expect(await fold.evaluate((one: HTMLDetailsElement) => one.open)).toBe(false);
+    await fold.locator('summary').click();
+    await type(page, 'clear opening', '80');
+    await said(page, '.answer', 'asks for 83 m');
+    await page.waitForFunction(() => document.querySelector('.limit text')?.textContent.startsWith('83'));
+    expect(await fold.evaluate((one: HTMLDetailsElement) => one.open)).toBe(true);
+    silent(heard);
+  });
+
+  it('at its best a step of the opening is on screen within a thirtieth of a second and one frame', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    const field = page.getByRole('spinbutton', { name: 'clear opening' });
+    await field.focus();
+    const times: number[] = [];
+    for (let step = 0; step < 24; step += 1) {
+      times.push(
+        await page.evaluate(async () => {
+          const shown = (): string | undefined => document.querySelector('.limit text')?.textContent;
+          const before = shown();
+          const start = performance.now();
+          document.activeElement!.dispatchEvent(
+            new KeyboardEvent('keydown', { key: 'ArrowUp', bubbles: true, cancelable: true }),
+          );
+          while (shown() === before) await new Promise((done) => requestAnimationFrame(done));
+          return performance.now() - start;
+        }),
+      );
+    }
+    times.sort((a, b) => a - b);
+    expect(times[0]!).toBeLessThan(1000 / 30 + 1000 / 60);
+    silent(heard);
+  });
+});
