@@ -1,4 +1,4 @@
-import { loadStandard, materials, trafficOnDeck } from '../../actions/index.ts';
+import { loadStandard, materials, trafficOnDeck, type TrafficLoad } from '../../actions/index.ts';
 import type { UnitTask } from '../../model/index.ts';
 import { designSlab } from '../common/slab/designSlab.ts';
 import { beamCounts, beamLayout } from './beamLayout.ts';
@@ -18,6 +18,7 @@ export interface RankedChoice extends BeamChoice {
  */
 export function rankedChoices(task: UnitTask): RankedChoice[] {
   const haunchM = precastData.haunchM.value;
+  const deck = trafficOnDeck(task.standard, task.deck);
   const choices = beamCounts(task).flatMap((count) => {
     const layout = beamLayout(task.deck.widthM, count);
     const slab = designSlab({
@@ -31,7 +32,7 @@ export function rankedChoices(task: UnitTask): RankedChoice[] {
     });
     return beamsFor(task.standard, task.depthM - slab.rootM - haunchM).map((shape): RankedChoice => {
       const choice = { layout, slab, shape, haunchM };
-      return { ...choice, proxyM3PerM: proxy(task, choice) };
+      return { ...choice, proxyM3PerM: proxy(task, choice, deck) };
     });
   });
   return choices.sort((a, b) => a.proxyM3PerM - b.proxyM3PerM);
@@ -41,11 +42,10 @@ export function rankedChoices(task: UnitTask): RankedChoice[] {
  * Concrete of beams and slab and an estimate of the strand, m3 per m of deck: force P (1/A + e/W) on the beam for the
  * soffit under all permanent load and an even share of the traffic in service, at 0.6 of the strength of the strand.
  */
-function proxy(task: UnitTask, { layout, slab, shape }: BeamChoice): number {
+function proxy(task: UnitTask, { layout, slab, shape }: BeamChoice, deck: TrafficLoad): number {
   const standard = loadStandard(task.standard);
   const gamma = standard.unitWeights.concreteKNm3;
   const spanM = Math.max(...task.spansM);
-  const deck = trafficOnDeck(task.standard, task.deck);
   const { vehicle, uniform } = standard.factors.sls;
   const alone = gamma * (shape.areaM2 + (slab.meanM * task.deck.widthM) / layout.count);
   const later =

@@ -98,8 +98,7 @@ function deflection(model: PrecastModel): [demand: number, capacity: number] {
   const line = deflectionInfluence(beam, beam.supportAt[span]! + elementsPerSpan / 2);
   const track = beamTrack(beam);
   // Under EN every beam for what it carries; AASHTO shares the lanes out evenly (2.5.2.6.2, from memory).
-  const whole = trafficOnDeck(standardId, task.deck);
-  const load = standardId === 'lm1' ? model.traffic : whole;
+  const load = standardId === 'lm1' ? model.traffic : trafficOnDeck(standardId, task.deck);
   const share = standardId === 'lm1' ? 1 : 1 / layout.count;
   const deepest = combinations.map(
     ({ vehicle, uniform }) =>
