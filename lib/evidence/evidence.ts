@@ -2,6 +2,7 @@ import cables from '../../data/evidence/cables.json';
 import compositeI from '../../data/evidence/composite-i.json';
 import loads from '../../data/evidence/loads.json';
 import mechanics from '../../data/evidence/mechanics.json';
+import precastI from '../../data/evidence/precast-i.json';
 import sections from '../../data/evidence/sections.json';
 import { evidenceCases } from './cases/index.ts';
 import { evidenceFile, type EvidenceRow } from './evidenceRow.ts';
@@ -14,6 +15,7 @@ const files: Readonly<Record<string, unknown>> = {
   sections,
   cables,
   'composite-i': compositeI,
+  'precast-i': precastI,
 };
 
 /** Names of the files read, with their ending. */
