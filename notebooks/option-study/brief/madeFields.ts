@@ -1,5 +1,6 @@
 import type { Budget, Crossing, Study } from '../../../lib/index.ts';
-import { putAt, type Figure, type Made } from '../../page/index.ts';
+import type { Figure, Made } from '../../page/index.ts';
+import { putAt } from '../../page/place.ts';
 
 /** How the road lies in plan. */
 export type PlanShape = 'straight' | 'curve' | 'unknown';

@@ -1,0 +1,106 @@
+import { describe, expect, it } from 'vitest';
+import { clearanceState, withClearanceState } from '../../notebooks/option-study/brief/clearanceState.ts';
+import { withEntry, withoutEntry } from '../../notebooks/option-study/brief/listEdits.ts';
+import {
+  budgetAmount,
+  envelopeWidth,
+  groundProved,
+  laneCount,
+  obstacleWidth,
+  planShape,
+  radiusOfCurve,
+} from '../../notebooks/option-study/brief/madeFields.ts';
+import { hasUltimate, stripForGap, withStripWidth } from '../../notebooks/option-study/brief/stripEdits.ts';
+import { placesOf, workedStudy } from './study.ts';
+
+const study = workedStudy();
+
+describe('made fields', () => {
+  it('planShape: a curve has a radius to be typed, straight and unknown have none', () => {
+    const curve = planShape.put(study, 'curve');
+    expect(typeof curve.brief.crossing.planRadiusM).toBe('number');
+    expect(radiusOfCurve.put(curve, 400).brief.crossing.planRadiusM).toBe(400);
+    expect(planShape.put(radiusOfCurve.put(curve, 400), 'curve').brief.crossing.planRadiusM).toBe(400);
+    expect(planShape.put(curve, 'unknown').brief.crossing.planRadiusM).toBe('unknown');
+    expect(placesOf(curve)).toEqual([]);
+  });
+
+  it('laneCount: lanes come and go beside the last lane, the other strips stay', () => {
+    const kinds = (count: number): string =>
+      laneCount
+        .put(study, count)
+        .brief.deck.map(({ kind }) => kind[0])
+        .join('');
+    expect(kinds(2)).toBe('bsllsbfp');
+    expect(kinds(4)).toBe('bsllllsbfp');
+    expect(kinds(1)).toBe('bslsbfp');
+  });
+
+  it('obstacleWidth and envelopeWidth: about the middle', () => {
+    const wider = obstacleWidth(1).put(study, 80).brief.obstacles[1]!;
+    expect([wider.fromM, wider.toM]).toEqual([1315, 1395]);
+    const narrower = envelopeWidth(2).put(study, 10).brief.obstacles[2]!.clearance!;
+    expect([narrower.fromM, narrower.toM]).toEqual([1350, 1360]);
+  });
+
+  it('budgetAmount: given again it comes back with its price date and scope', () => {
+    const amount = budgetAmount('2026 Q1');
+    const without = amount.put(study, 'unknown');
+    expect(without.brief.budget).toBe('unknown');
+    expect(amount.put(without, 8e6).brief.budget).toEqual({ ...(study.brief.budget as object), amount: 8e6 });
+    const fresh = budgetAmount('2026 Q1').put(without, 8e6);
+    expect(fresh.brief.budget).toEqual({ amount: 8e6, priceDate: '2026 Q1', includes: '' });
+    expect(placesOf(fresh)).toEqual([]);
+  });
+
+  it('groundProved: all stretches at once', () => {
+    expect(groundProved.get(study)).toBe('unknown');
+    const proved = groundProved.put(study, 'known');
+    expect(groundProved.get(proved)).toBe('known');
+    expect(groundProved.put(proved, 'part')).toBe(proved);
+  });
+});
+
+describe('clearances', () => {
+  it('are a preset until confirmed, and start over the whole stretch from the water or the ground', () => {
+    const [railway, river] = study.brief.obstacles;
+    expect(clearanceState(railway!)).toBe('preset');
+    const confirmed = withClearanceState(study.brief, railway!, 'confirmed');
+    expect(confirmed.clearance).toEqual({ ...railway!.clearance, confirmed: true });
+    const given = withClearanceState(study.brief, river!, 'preset');
+    expect(given.clearance).toMatchObject({ fromM: 1325, toM: 1385, datumLevelM: 7.2, confirmed: false });
+    const dry = withClearanceState(
+      study.brief,
+      { ...river!, kind: 'road', fromM: 1400, toM: 1440 },
+      'preset',
+    );
+    expect(dry.clearance?.datumLevelM).toBe(10.54);
+    expect(withClearanceState(study.brief, railway!, 'none').clearance).toBeNull();
+  });
+});
+
+describe('strips', () => {
+  it('carry their ultimate width with them only while it is the same', () => {
+    const wider = withStripWidth(study, 2, 3.65).brief.deck[2]!;
+    expect(wider).toEqual({ kind: 'lane', widthM: 3.65, ultimateWidthM: 3.65 });
+    expect(hasUltimate(study.brief.deck)).toBe(false);
+    const apart = {
+      ...study,
+      brief: {
+        ...study.brief,
+        deck: study.brief.deck.map((strip, i) => (i === 2 ? { ...strip, ultimateWidthM: 4 } : strip)),
+      },
+    };
+    expect(hasUltimate(apart.brief.deck)).toBe(true);
+    expect(withStripWidth(apart, 2, 3.65).brief.deck[2]!.ultimateWidthM).toBe(4);
+  });
+
+  it('a gap takes a strip like its left neighbour', () => {
+    const { deck } = study.brief;
+    expect(stripForGap(deck, 0).kind).toBe('barrier');
+    expect(stripForGap(deck, 3).kind).toBe('lane');
+    const added = withEntry(study, ['brief', 'deck'], 8, stripForGap(deck, 8));
+    expect(added.brief.deck.map(({ kind }) => kind).slice(-2)).toEqual(['parapet', 'parapet']);
+    expect(withoutEntry(added, ['brief', 'deck'], 8).brief.deck).toEqual(deck);
+  });
+});
