@@ -15,8 +15,13 @@ const droppedTotal = ({ droppedCounts }: Appraisal): number =>
 /** What was not worked out, by form and reason. */
 function droppedTable(appraisal: Appraisal): HTMLElement {
   const rows = [
-    ...appraisal.dropped.map(({ form, because }) => ({ form, reason: because.join('; '), count: null })),
-    ...appraisal.droppedCounts,
+    ...appraisal.dropped.map(({ form, because }) => ({
+      form,
+      reason: because.join('; '),
+      count: null,
+      figure: undefined,
+    })),
+    ...appraisal.droppedCounts.map((one, i) => ({ ...one, figure: `droppedCounts/${i}/count` })),
   ];
   return h(
     'details',
@@ -37,13 +42,13 @@ function droppedTable(appraisal: Appraisal): HTMLElement {
       h(
         'tbody',
         {},
-        rows.map(({ form, reason, count }) =>
+        rows.map(({ form, reason, count, figure }) =>
           h(
             'tr',
             {},
             h('th', { scope: 'row' }, formLooks[form].short),
             h('td', { class: 'text' }, reason),
-            h('td', {}, count === null ? 'form dropped' : fixed(count, 0)),
+            h('td', { 'data-figure': figure }, count === null ? 'form dropped' : fixed(count, 0)),
           ),
         ),
       ),

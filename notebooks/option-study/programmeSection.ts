@@ -5,7 +5,7 @@ import { tradeOffs, tradeOffTable, type Measure } from '../charts/tradeOffs.ts';
 import type { Appraisal, AppraisedOption, Spread } from '../../lib/index.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
-import type { LineSection, Sheet } from '../page/index.ts';
+import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import { mainDesign, mainDesignPath } from '../drawing/sectionRow.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
@@ -56,7 +56,13 @@ export function programmeSection(page: Sheet, cells: StudyCells): LineSection {
   const { appraisal, reference } = cells;
   const finding = page.live({ appraisal }, (v) => {
     const quick = [...v.appraisal.options].sort((a, b) => a.months.p50 - b.months.p50)[0];
-    return quick ? `Option ${quick.number} is first, after ${fixed(quick.months.p50, 0)} months.` : '';
+    return quick
+      ? [
+          `Option ${quick.number} is first, after `,
+          workedFigure(ofOption(quick, 'months/p50'), fixed(quick.months.p50, 0)),
+          ' months.',
+        ]
+      : '';
   });
   return page.section(8, 'Programme', finding, [
     page.cell({

@@ -1,18 +1,21 @@
 import type { AppraisedOption, Ruling } from '../../lib/index.ts';
 import { ranking } from '../charts/ranking.ts';
+import { ofOption } from '../drawing/asked.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
 import { fixed } from '../format.ts';
-import { h } from '../html.ts';
-import type { LineSection, Sheet } from '../page/index.ts';
+import { h, type HtmlChild } from '../html.ts';
+import { pushed, workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
 
 const effects: readonly Ruling['effect'][] = ['out', 'caution', 'to confirm', 'in favour'];
 
-const flipWords = ({ flip }: Ruling): string =>
-  flip
-    ? ` Turns when ${flip.fact} goes from ${fixed(flip.from, 2)} to ${fixed(flip.to, 2)} ${flip.unit}.`
-    : '';
+const flipWords = (option: AppraisedOption, { flip, rule }: Ruling): HtmlChild => {
+  if (!flip) return '';
+  const end = (which: 'from' | 'to'): HTMLElement =>
+    workedFigure(ofOption(option, `rulings/${rule}/flip/${which}`), fixed(flip[which], 2));
+  return [` Turns when ${flip.fact} goes from `, end('from'), ' to ', end('to'), ` ${flip.unit}.`];
+};
 
 /** What the rules say of one option, worst first. */
 function rulingsOf(option: AppraisedOption): HTMLElement {
@@ -43,7 +46,7 @@ function rulingsOf(option: AppraisedOption): HTMLElement {
               },
               ruling.effect,
             ),
-            h('td', { class: 'text' }, `${ruling.because.join('; ')}.${flipWords(ruling)}`),
+            h('td', { class: 'text' }, `${ruling.because.join('; ')}.`, flipWords(option, ruling)),
             h('td', { class: 'text source' }, ruling.source),
           ),
         ),
@@ -63,13 +66,16 @@ export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
       shows: { appraisal, reference, brief },
       wide: true,
       body: (v) =>
-        ranking({
-          options: v.appraisal.options,
-          standing: v.appraisal.standing,
-          budget: budgetOf(v.brief),
-          currency: v.appraisal.currency,
-          reference: v.reference?.number ?? null,
-        }),
+        pushed(
+          'Ranking',
+          ranking({
+            options: v.appraisal.options,
+            standing: v.appraisal.standing,
+            budget: budgetOf(v.brief),
+            currency: v.appraisal.currency,
+            reference: v.reference?.number ?? null,
+          }),
+        ),
       notes: (v) => [
         v.appraisal.standing.because.slice(1).map((words) => h('p', {}, words)),
         v.appraisal.dropped.map(({ form, because }) => h('p', {}, `${form} dropped: ${because.join('; ')}.`)),

@@ -1,7 +1,10 @@
-import type { Appraisal, AppraisedOption, Brief, Site, Study } from '../../lib/index.ts';
-import { spansOf } from '../drawing/alongOption.ts';
+import type { Appraisal, AppraisedOption, Brief, Site, Spread, Study } from '../../lib/index.ts';
+import { spanPaths, spansOf } from '../drawing/alongOption.ts';
+import { ofOption } from '../drawing/asked.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
 import { currencySign, fixed, listed, money2, moneyUnit, odds, spansText } from '../format.ts';
+import type { HtmlChild } from '../html.ts';
+import { workedFigure } from '../page/index.ts';
 
 /** Money in the unit of the page, e.g. '6.3 M€'. */
 export function moneyWords(value: number, currency: string): string {
@@ -19,23 +22,30 @@ export const pricesWords = (study: Pick<Study, 'brief' | 'books'>): string =>
     ? study.books.currency
     : `${study.brief.budget.priceDate}, ${study.books.currency}`;
 
-/** An option in running text: 'Composite I-girders at 41 + 63 + 41 m'. */
-export const optionWords = (option: AppraisedOption): string =>
-  `${optionTitle(option)} at ${spansText(spansOf(option))} m`;
-
 /** The first option of each form, in order. */
 export function firstOfEachForm(options: readonly AppraisedOption[]): AppraisedOption[] {
   return options.filter((option, i) => options.findIndex(({ form }) => form === option.form) === i);
 }
 
 /** The page's answer in one or two sentences. */
-export function answerWords({ options, standing, currency }: Appraisal): string {
+export function answerWords({ options, standing, currency }: Appraisal): HtmlChild {
   const leader = options.find((option) => option.number === standing.leader);
   if (!leader) return 'No option stands inside the rules. What would let one in is said at 10+010.';
-  const { p10, p50, p90 } = leader.cost;
-  const unit = moneyUnit(currency, p50);
-  const range = `${money2(p10 / unit.per)} and ${money2(p90 / unit.per)}`;
-  const first = `${optionWords(leader)} come out at ${money2(p50 / unit.per)} ${unit.label}, between ${range}.`;
+  const unit = moneyUnit(currency, leader.cost.p50);
+  const cost = (point: keyof Spread): HTMLElement =>
+    workedFigure(ofOption(leader, `cost/${point}`), money2(leader.cost[point] / unit.per));
+  const spans = spanPaths(leader).filter((path) => path !== undefined);
+  const first: HtmlChild = [
+    `${optionTitle(leader)} at `,
+    workedFigure(spans, spansText(spansOf(leader))),
+    ' m come out at ',
+    cost('p50'),
+    ` ${unit.label}, between `,
+    cost('p10'),
+    ' and ',
+    cost('p90'),
+    '.',
+  ];
   const group = standing.groups.find((one) => one.includes(leader.number)) ?? [];
   const others = options.filter((option) => group.includes(option.number) && option.form !== leader.form);
   const rivals = firstOfEachForm(others);
@@ -43,12 +53,17 @@ export function answerWords({ options, standing, currency }: Appraisal): string 
     const next = options.find((option) => option.form !== leader.form && option.status !== 'out');
     if (!next) return first;
     const share = standing.odds[leader.number]?.[next.number] ?? Number.NaN;
-    return `${first} ${optionTitle(next)} are next; the odds that they are dearer are ${odds(share)} %.`;
+    return [
+      first,
+      ` ${optionTitle(next)} are next; the odds that they are dearer are `,
+      workedFigure(`standing/odds/${leader.number}/${next.number}`, odds(share)),
+      ' %.',
+    ];
   }
   const said = listed(
     rivals.map((option) => `option ${option.number} (${optionTitle(option).toLowerCase()})`),
   );
-  return `${first} ${said.charAt(0).toUpperCase()}${said.slice(1)} cannot be separated from them on cost.`;
+  return [first, ` ${said.charAt(0).toUpperCase()}${said.slice(1)} cannot be separated from them on cost.`];
 }
 
 /** What to do first, from what is not known yet. */
@@ -64,12 +79,16 @@ export function nextWords(brief: Brief): string {
 }
 
 /** What has to be crossed, in a sentence. */
-export function crossingWords(site: Site): string {
+export function crossingWords(site: Site): HtmlChild {
   const names = [...new Set(site.zones.map((zone) => zone.kind))].map((kind) => `a ${kind}`);
   const plain = site.soffitLimits.some((limit) => limit.kind === 'flood') ? ['a flood plain'] : [];
   const all = [...names, ...plain];
   const said = all.length > 0 ? listed(all) : 'open ground';
-  return `${said.charAt(0).toUpperCase()}${said.slice(1)} in ${fixed(site.lengthM, 0)} m.`;
+  return [
+    `${said.charAt(0).toUpperCase()}${said.slice(1)} in `,
+    workedFigure('site/lengthM', fixed(site.lengthM, 0)),
+    ' m.',
+  ];
 }
 
 /** '€/m²' of the study's currency. */
