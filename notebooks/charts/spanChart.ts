@@ -112,9 +112,13 @@ function linesOf({ words, flip }: SpanRow, widthPx: number, size: number): reado
   const said = wrapText(words, widthPx, size);
   const lines = said.map((text, line) => ({ text, second: false, dx: 0, line }));
   if (flip === undefined) return lines;
-  const dx = textWidth(`${words}  `, size);
+  const before = `${words}; `;
+  const dx = textWidth(before, size);
   if (said.length === 1 && dx + textWidth(flip, size) <= widthPx)
-    return [...lines, { text: flip, second: true, dx, line: 0 }];
+    return [
+      { text: before.trimEnd(), second: false, dx: 0, line: 0 },
+      { text: flip, second: true, dx, line: 0 },
+    ];
   const below = wrapText(flip, widthPx, size);
   return [...lines, ...below.map((text, at) => ({ text, second: true, dx: 0, line: said.length + at }))];
 }

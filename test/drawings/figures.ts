@@ -18,7 +18,14 @@ export const spanRows: readonly SpanRow[] = [
     words: 'needs 63 m; slabs stop at 35 m',
     flip: 'possible at 35 m, 28 m shorter',
   },
-  { form: 'portal-frame', usual: [10, 30], possible: [6, 50], status: 'out', words: 'stops at 50 m' },
+  {
+    form: 'portal-frame',
+    usual: [10, 30],
+    possible: [6, 50],
+    status: 'out',
+    words: 'stops at 50 m',
+    flip: 'possible at 50 m',
+  },
   {
     form: 'precast-i',
     usual: [20, 45],
