@@ -256,6 +256,16 @@ export const precastManual: readonly Descriptor[] = [
     'spacingM',
   ),
   sized(
+    'curvatureFactor',
+    'what curvature in plan adds to the loads of the outer beam',
+    '',
+    '1 + n a e / sum a2, e a third of the sagitta L2 / 8R; 1 on a straight',
+    './task/planRadiusM',
+    'spans',
+    'spacingM',
+    'beamLines',
+  ),
+  sized(
     'laneVehicles',
     'vehicles of lane 1 on the beam that carries most',
     'no',
@@ -301,12 +311,13 @@ export const precastManual: readonly Descriptor[] = [
     label: 'superimposed load on a beam',
     unit: 'kN/m',
     method: 'ratio',
-    formula: 'superimposed load of the deck / lines',
+    formula: 'what curvature adds x superimposed load of the deck / lines',
     inputs: (at) => ({
+      curve: `${at.unit}/figures/curvatureFactor`,
       deck: `${at.unit}/task/deck/superimposedKNm`,
       lines: `${at.unit}/figures/beamLines`,
     }),
-    compute: ({ deck, lines }) => deck / lines,
+    compute: ({ curve, deck, lines }) => (curve * deck) / lines,
   }),
   sized(
     'liftingSafety',

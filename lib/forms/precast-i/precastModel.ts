@@ -48,6 +48,8 @@ export interface PrecastModel extends BeamChoice {
   readonly wetKNm: number;
   readonly superimposedKNm: number;
   readonly diaphragmKN: number;
+  /** What curvature in plan adds to slab, superimposed load and traffic of the outer beam; 1 on a straight. */
+  readonly curve: number;
   readonly traffic: TrafficLoad;
   /** Beam after continuity and what acts on it, characteristic. */
   readonly beam: LineBeam;
@@ -89,10 +91,11 @@ export function precastModel(task: UnitTask, choice: BeamChoice, girder?: number
   const wetM2 = Math.max(inner, outer) + haunchM * shape.topWidthM;
   const { withinM, heightShare } = precastData.diaphragm;
   const diaphragmKN = gamma * withinM * heightShare * shape.depthM * (layout.spacingM - shape.webM);
-  const traffic = worstTraffic(task, choice, composite, 1 / composite.slabRatio, girder);
+  const curve = chordFactor(task, layout);
+  const traffic = amplified(worstTraffic(task, choice, composite, 1 / composite.slabRatio, girder), curve);
   const eiKNm2 = beamConcrete.ecmMPa * 1e3 * composite.inertiaM4;
   const beam = lineBeam({ spansM: task.spansM, stationsPerSpan: elementsPerSpan, eiKNm2: () => eiKNm2 });
-  const superimposedKNm = task.deck.superimposedKNm / layout.count;
+  const superimposedKNm = (curve * task.deck.superimposedKNm) / layout.count;
   const most = trafficEnvelope(beam, traffic, { deflection: false });
   const heightM = shape.depthM + haunchM + slab.rootM;
   // A warm top is longer and lifts the middle: negative where sagging is positive.
@@ -111,15 +114,36 @@ export function precastModel(task: UnitTask, choice: BeamChoice, girder?: number
     jackMPa: precastData.strand.jacking[id] * materials.strand[id].ultimateMPa,
     composite,
     ownKNm: gamma * shape.areaM2,
-    wetKNm: gamma * wetM2,
+    wetKNm: curve * gamma * wetM2,
     superimposedKNm,
     diaphragmKN,
+    curve,
     traffic,
     beam,
     superimposed: uniform(beam, superimposedKNm),
     most,
     warmth: imposedCurvature(beam, new Float64Array(beam.xM.length).fill(perKelvin)),
     simple: simpleSpans(task.spansM, superimposedKNm, traffic, standard),
+  };
+}
+
+/**
+ * Straight beams under a curved deck: set a third of the sagitta L2 / 8R off, the deck runs that much further out at
+ * midspan, and the outer beam takes 1 + n a e / sum a2 of its even share (rigid crossbeam).
+ */
+function chordFactor(task: UnitTask, layout: BeamLayout): number {
+  if (!(task.planRadiusM < Infinity)) return 1;
+  const eM = Math.max(...task.spansM) ** 2 / (8 * task.planRadiusM) / 3;
+  const second = layout.offsetsM.reduce((sum, y) => sum + y * y, 0);
+  return 1 + (layout.count * Math.max(...layout.offsetsM) * eM) / second;
+}
+
+function amplified(load: TrafficLoad, factor: number): TrafficLoad {
+  return {
+    ...load,
+    vehicleFactor: load.vehicleFactor * factor,
+    udlKNm: load.udlKNm * factor,
+    footwayKNm: load.footwayKNm * factor,
   };
 }
 

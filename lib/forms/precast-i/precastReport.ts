@@ -33,7 +33,10 @@ export function precastReactions(model: PrecastModel): SupportReaction[] {
     const diaphragm = gamma * (j === 0 || j === last ? one.endM3 : one.pierM3);
     return {
       permanentKN:
-        (half[j - 1] ?? 0) + (half[j] ?? 0) + diaphragm + layout.count * model.superimposed.reactionKN[j]!,
+        (half[j - 1] ?? 0) +
+        (half[j] ?? 0) +
+        diaphragm +
+        (layout.count * model.superimposed.reactionKN[j]!) / model.curve,
       trafficMaxKN: most.reactionMaxKN[j]! * ratio(whole.max, single.max),
       trafficMinKN: most.reactionMinKN[j]! * ratio(whole.min, single.min),
     };
@@ -70,6 +73,7 @@ export function precastFigures(
     slabM: slab.midM,
     compositeInertiaM4: composite.inertiaM4,
     compositeCentroidM: composite.centroidM,
+    curvatureFactor: model.curve,
     laneVehicles: model.traffic.vehicleFactor,
     trafficUniformKNm: model.traffic.udlKNm,
     ownKNm: model.ownKNm,

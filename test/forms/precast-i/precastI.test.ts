@@ -78,6 +78,17 @@ describe('precastI.size(task)', () => {
     expect(strands(35, 2, 5)).toBeGreaterThan(strands(35, 2, 7));
   });
 
+  it('asks more of straight beams under a curved deck, and lays the same weight down', () => {
+    const straight = precastI.size({ ...task([30, 30], 1.9), girders: 6 });
+    const curved = precastI.size({ ...task([30, 30], 1.9), girders: 6, planRadiusM: 300 });
+    // Sagitta 900 / 2400 = 0.375 m, a third of it 0.125 m; 6 beams: n a / sum a2 = 6 x 2.5 s / 17.5 s2.
+    const spacingM = straight.figures['spacingM']!;
+    expect(curved.figures['curvatureFactor']).toBeCloseTo(1 + ((6 * 2.5) / 17.5 / spacingM) * 0.125, 9);
+    expect(curved.figures['span1DesignKNm']).toBeGreaterThan(straight.figures['span1DesignKNm']!);
+    expect(curved.reactions[1]!.permanentKN).toBeCloseTo(straight.reactions[1]!.permanentKN, 6);
+    expect(curved.reactions[1]!.trafficMaxKN).toBeCloseTo(straight.reactions[1]!.trafficMaxKN, 6);
+  });
+
   it('says which limit a span is past', () => {
     const shallow = precastI.size(task([45, 45], 1.4));
     expect(shallow.limitingCheck.utilisation).toBeGreaterThan(1);
