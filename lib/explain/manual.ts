@@ -6,6 +6,7 @@ import { rulingFigures } from '../appraise/rulingFigures.ts';
 import { arrangementFigures } from '../arrange/figures.ts';
 import { standingFigures } from '../decide/figures.ts';
 import { cableFigures } from '../forms/cable-stayed/figures.ts';
+import { cantileverFigures } from '../forms/cantilever-box/figures.ts';
 import { compositeFigures } from '../forms/composite-i/figures.ts';
 import { boxFigures } from '../forms/concrete-box/figures.ts';
 import { designFigures } from '../forms/figures.ts';
@@ -39,6 +40,7 @@ export const manual: readonly Descriptor[] = [
   ...arrangementFigures,
   // A form speaks for its own figures first.
   ...slabBridgeFigures,
+  ...cantileverFigures,
   ...compositeFigures,
   ...boxFigures,
   ...precastManual,

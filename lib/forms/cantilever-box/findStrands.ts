@@ -165,7 +165,7 @@ function unitsFor(
 function whole(model: CantileverModel, strands: Float64Array, unit: number, most: number): Float64Array {
   const step = unit * model.layout.webs;
   const room = Math.floor(most / step) * step;
-  return strands.map((count) => Math.min(room, step * Math.ceil(count / step - 1e-6)));
+  return strands.map((count) => Math.max(0, Math.min(room, step * Math.ceil(count / step - 1e-6))));
 }
 
 /** Strands the top slab has room for over a pier. */

@@ -1,0 +1,99 @@
+import type { Descriptor } from '../../model/index.ts';
+import { formManual } from '../common/formManual.ts';
+import { slabCheckFigures } from '../common/slab/slabFigures.ts';
+import { stages, tendons, type Row } from './stageFigures.ts';
+
+const manual = formManual('cantilever-box');
+const { sized } = manual;
+const depths = ['./task/depthM', './depthM/support'] as const;
+
+const section: readonly Row[] = [
+  [
+    'cells',
+    'cells of the box',
+    'no',
+    'as few as keep the webs within their practical spacing',
+    './task/deck/widthM',
+  ],
+  ['webs', 'webs of the box', 'no', 'cells + 1', 'cells'],
+  [
+    'webSpacingM',
+    'spacing of the webs',
+    'm',
+    'deck width over cells and overhangs',
+    './task/deck/widthM',
+    'cells',
+  ],
+  ['overhangM', 'overhang beyond the outer web', 'm', 'share of the web spacing', 'webSpacingM'],
+  ['topSlabMidM', 'top slab between the webs', 'm', 'least thickness with practical bars', 'webSpacingM'],
+  ['topSlabRootM', 'top slab over the webs', 'm', 'least thickness with practical bars', 'overhangM'],
+  [
+    'webM',
+    'web in the spans',
+    'm',
+    'least practical; thicker by shear and torsion',
+    ...depths,
+    'shearDesignKN',
+  ],
+  [
+    'webAtSupportsM',
+    'web at the supports',
+    'm',
+    'thicker in steps until struts and stirrups hold',
+    'shearDesignKN',
+  ],
+  [
+    'bottomSlabM',
+    'bottom slab in the spans',
+    'm',
+    'two layers of bars and its clear span; thicker by compression',
+    'webSpacingM',
+  ],
+  [
+    'bottomSlabAtPiersM',
+    'bottom slab at the piers',
+    'm',
+    'thicker in steps until it holds the compression of all stages and of ultimate bending',
+    'pier*CantileverKNm',
+    'pier*OwnKNm',
+    './depthM/support',
+  ],
+  [
+    'boxInnerHeightM',
+    'clear height inside the box at midspan',
+    'm',
+    'depth - top slab - bottom slab',
+    './task/depthM',
+    'bottomSlabM',
+    'topSlabMidM',
+  ],
+  ...(
+    [
+      ['areaM2', 'area at midspan', 'm2', 'webM', 'bottomSlabM'],
+      ['inertiaM4', 'inertia at midspan', 'm4', 'webM', 'bottomSlabM'],
+      ['centroidFromTopM', 'centroid at midspan below the top', 'm', 'webM', 'bottomSlabM'],
+      ['pierAreaM2', 'area over the piers', 'm2', 'webAtSupportsM', 'bottomSlabAtPiersM'],
+      ['pierInertiaM4', 'inertia over the piers', 'm4', 'webAtSupportsM', 'bottomSlabAtPiersM'],
+      [
+        'pierCentroidFromTopM',
+        'centroid over the piers below the top',
+        'm',
+        'webAtSupportsM',
+        'bottomSlabAtPiersM',
+      ],
+    ] as const
+  ).map(([name, label, unit, ...from]): Row => [
+    name,
+    label,
+    unit,
+    'polygon of the outline less its cells',
+    ...depths,
+    ...from,
+  ]),
+];
+
+/** Cantilevered box: section, stages, tendons, and the checks of its top slab. */
+export const cantileverFigures: readonly Descriptor[] = [
+  ...[...section, ...stages, ...tendons].map((row) => sized(...row)),
+  ...slabCheckFigures(manual, 'topSlabMidM'),
+];
