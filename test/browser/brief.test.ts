@@ -1,7 +1,10 @@
+import { readFileSync } from 'node:fs';
+import { resolve } from 'node:path';
 import type { Locator, Page } from 'playwright-core';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { openSite, type Heard, type Site } from './site.ts';
 
+const root = resolve(import.meta.dirname, '../..');
 let site: Site;
 beforeAll(async () => {
   site = await openSite();
@@ -255,6 +258,22 @@ describe('the ground', () => {
     expect(await page.locator('.stretch-block').count()).toBe(5);
     await type(page, 'stretch 1, to, m', '1250');
     expect(await field(page, 'stretch 2, from, m').textContent()).toBe('1\u2009250');
+    silent(heard);
+  });
+});
+
+describe('access', () => {
+  it('axe finds nothing serious in the brief, also with problems in it', async () => {
+    const { page, heard } = await study();
+    await type(page, 'obstacle 2, to, m', '1300');
+    await type(page, 'stretch 1, class 1, odds, %', '40');
+    await page.evaluate(readFileSync(resolve(root, 'node_modules/axe-core/axe.min.js'), 'utf8'));
+    const found = await page.evaluate(async () => {
+      const { axe } = window as unknown as { axe: typeof import('axe-core') };
+      const { violations } = await axe.run('#s1');
+      return violations.map(({ id, impact, nodes }) => [id, impact, nodes[0]?.html]);
+    });
+    expect(found.filter(([, impact]) => impact === 'serious' || impact === 'critical')).toEqual([]);
     silent(heard);
   });
 });
