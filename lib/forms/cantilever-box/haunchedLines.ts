@@ -6,6 +6,7 @@ import { heightUnder } from '../concrete-box/heightUnder.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
+import { formsAlong } from './sectionsAlong.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
 /** Values at the stations summed along the deck. */
@@ -83,7 +84,8 @@ export function haunchedLines(model: CantileverModel, box: SizedHaunched): Measu
     measured(
       'deck',
       'box-formwork',
-      along(model, box.sections.formsM) + diaphragmForms(weight.diaphragmM3, (j) => model.depthsM.has(j)),
+      along(model, formsAlong(model, box.sections)) +
+        diaphragmForms(weight.diaphragmM3, (j) => model.depthsM.has(j)),
       'forms of the box',
       'outside without the top of the deck, cells without their floor, both faces of diaphragms',
     ),

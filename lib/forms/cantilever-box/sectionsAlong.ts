@@ -21,8 +21,8 @@ export interface HaunchedSections {
   readonly topM: Float64Array;
   readonly lowM: Float64Array;
   readonly bottomWidthM: Float64Array;
-  /** Formed faces per m of deck. */
-  readonly formsM: Float64Array;
+  /** Sections at the knots of the arms of each inner pier. */
+  readonly atKnots: ReadonlyMap<number, readonly BoxSection[]>;
   /** Area along the arms of each inner pier, by way from the pier, m2. */
   readonly armAreaM2: ReadonlyMap<number, (way: number) => number>;
 }
@@ -60,11 +60,10 @@ type Numbers = readonly [
   top: number,
   low: number,
   width: number,
-  forms: number,
 ];
 
 function numbersOf(s: BoxSection): Numbers {
-  return [s.webM, s.bottomM, s.areaM2, s.inertiaM4, s.topM, s.lowM, s.bottomWidthM, formworkPerM(s.outline)];
+  return [s.webM, s.bottomM, s.areaM2, s.inertiaM4, s.topM, s.lowM, s.bottomWidthM];
 }
 
 /** Sections at knots of each arm, properties straight between them; webs thicken again beside the abutments. */
@@ -75,7 +74,11 @@ export function haunchedSections(model: CantileverModel, t: Thicknesses): Haunch
   const pierAt = new Map<number, BoxSection>();
   const onArms = new Map<number, readonly Numbers[]>();
   const armAreaM2 = new Map<number, (way: number) => number>();
-  const made = new Map<string, { readonly pier: BoxSection; readonly numbers: readonly Numbers[] }>();
+  const atKnots = new Map<number, readonly BoxSection[]>();
+  const made = new Map<
+    string,
+    { readonly at: readonly BoxSection[]; readonly numbers: readonly Numbers[] }
+  >();
   for (const [support, depthM] of depthsM) {
     const key = depthM.toFixed(4);
     let known = made.get(key);
@@ -88,11 +91,12 @@ export function haunchedSections(model: CantileverModel, t: Thicknesses): Haunch
           t.bottomM + (t.pierBottomM - t.bottomM) * slabShare(way),
         ),
       );
-      known = { pier: sections[0]!, numbers: sections.map(numbersOf) };
+      known = { at: sections, numbers: sections.map(numbersOf) };
       made.set(key, known);
     }
     const { numbers } = known;
-    pierAt.set(support, known.pier);
+    atKnots.set(support, known.at);
+    pierAt.set(support, known.at[0]!);
     onArms.set(support, numbers);
     armAreaM2.set(support, (way) => {
       const [k, share] = between(way);
@@ -100,14 +104,14 @@ export function haunchedSections(model: CantileverModel, t: Thicknesses): Haunch
     });
   }
   const n = beam.xM.length;
-  const arrays = Array.from({ length: 8 }, () => new Float64Array(n));
+  const arrays = Array.from({ length: 7 }, () => new Float64Array(n));
   const [mid, abutment] = [numbersOf(midspan), numbersOf(end)];
   for (let i = 0; i < n; i++) {
     const arm = model.arms[model.armAt[i]!];
     const numbers = arm ? onArms.get(arm.support)! : [mid];
     const [k, share] = arm ? between(model.way[i]!) : [0, 0];
     const atEnd = webShareAtEnd(model, i);
-    for (let j = 0; j < 8; j++) {
+    for (let j = 0; j < 7; j++) {
       const near = numbers[k]![j]!;
       const far = numbers[k + 1]?.[j] ?? near;
       arrays[j]![i] = near + share * (far - near) + atEnd * (abutment[j]! - mid[j]!);
@@ -126,9 +130,24 @@ export function haunchedSections(model: CantileverModel, t: Thicknesses): Haunch
     topM: arrays[4]!,
     lowM: arrays[5]!,
     bottomWidthM: arrays[6]!,
-    formsM: arrays[7]!,
+    atKnots,
     armAreaM2,
   };
+}
+
+/** Formed faces per m of deck at the stations, m. */
+export function formsAlong(model: CantileverModel, sections: HaunchedSections): Float64Array {
+  const atKnots = new Map(
+    [...sections.atKnots].map(([support, at]) => [support, at.map(({ outline }) => formworkPerM(outline))]),
+  );
+  const midspan = formworkPerM(sections.midspan.outline);
+  return model.way.map((way, i) => {
+    const arm = model.arms[model.armAt[i]!];
+    if (!arm) return midspan;
+    const at = atKnots.get(arm.support)!;
+    const [k, share] = between(way);
+    return at[k]! + share * (at[k + 1]! - at[k]!);
+  });
 }
 
 /** Knot before a way, and how far it lies on to the next. */

@@ -27,18 +27,19 @@ export function haunchedStresses(
 ): HaunchedStresses {
   const { permanent, total } = boxData.compression;
   const fck = model.concrete.fckMPa;
-  const { most } = model.traffic;
+  const { most: traffic } = model.traffic;
   const { open, lasting } = strandStates(model, found.stresses);
   const n = sections.areaM2.length;
   const soffitUse = new Float64Array(n);
   const nil: StressUse = { use: 0, stressMPa: 0, limitMPa: total * fck };
   const out = { pierSoffit: nil, spanSoffit: nil, top: nil };
   const note = (place: keyof typeof out, stressKPa: number, share: number): number => {
-    const limitMPa = share * fck;
-    const use = stressKPa / 1e3 / limitMPa;
-    if (use > out[place].use) out[place] = { use, stressMPa: stressKPa / 1e3, limitMPa };
+    const use = stressKPa / 1e3 / (share * fck);
+    if (use > out[place].use) out[place] = { use, stressMPa: stressKPa / 1e3, limitMPa: share * fck };
     return use;
   };
+  const states = [open, lasting] as const;
+  const owns = [weight.openKNm, weight.lastingKNm] as const;
   for (let i = 0; i < n; i++) {
     const area = sections.areaM2[i]!;
     const lowW = sections.inertiaM4[i]! / sections.lowM[i]!;
@@ -46,33 +47,35 @@ export function haunchedStresses(
     const et = sections.topM[i]! - cantileverData.topTendons.coverM;
     const eb = sections.lowM[i]! - cantileverData.bottomTendons.coverM;
     const soffit = model.armAt[i]! >= 0 && model.way[i]! < 0.5 ? 'pierSoffit' : 'spanSoffit';
-    const both = (axial: number, moment: number, share: number): void => {
-      soffitUse[i] = Math.max(soffitUse[i]!, note(soffit, axial - moment / lowW, share));
-      note('top', axial + moment / topW, share);
-    };
+    let most = 0;
     const stage = weight.cantileverKNm[i]!;
     if (stage < 0) {
       const kN = found.top[i]! * open.topKN;
-      both(kN / area, stage + kN * et, total);
+      const moment = stage + kN * et;
+      most = note(soffit, kN / area - moment / lowW, total);
+      note('top', kN / area + moment / topW, total);
     }
-    for (const [state, own] of [
-      [open, weight.openKNm[i]!],
-      [lasting, weight.lastingKNm[i]!],
-    ] as const) {
+    for (let k = 0; k < 2; k++) {
+      const state = states[k]!;
       const t = found.top[i]! * state.topKN;
       const b = found.bottom[i]! * state.bottomKN;
       const moment =
-        own +
+        owns[k]![i]! +
         model.superimposed.momentKNm[i]! +
         t * et -
         b * eb +
         state.topParasitic * found.parasiticTopKNm[i]! +
         state.bottomParasitic * found.parasiticBottomKNm[i]!;
       const axial = (t + b) / area;
-      both(axial, moment, permanent);
-      both(axial, moment + most.momentMinKNm[i]!, total);
-      both(axial, moment + most.momentMaxKNm[i]!, total);
+      most = Math.max(
+        most,
+        note(soffit, axial - moment / lowW, permanent),
+        note(soffit, axial - (moment + traffic.momentMinKNm[i]!) / lowW, total),
+      );
+      note('top', axial + moment / topW, permanent);
+      note('top', axial + (moment + traffic.momentMaxKNm[i]!) / topW, total);
     }
+    soffitUse[i] = most;
   }
   return { ...out, soffitUse };
 }

@@ -150,6 +150,9 @@ export function strandsNeeded(
   const stageTension = cantileverData.stageTensionMPa.value * 1e3;
   const around = model.standardId === 'lm1' ? boxData.decompressedAroundDuctM.value : Infinity;
   const { open, lasting } = strandStates(model, stresses);
+  const states = [open, lasting] as const;
+  const maxima = [use.openMax, use.lastingMax] as const;
+  const minima = [use.openMin, use.lastingMin] as const;
   const { coverM: topCover } = cantileverData.topTendons;
   const { coverM: lowCover } = cantileverData.bottomTendons;
   const { uls } = model.standard.factors;
@@ -174,10 +177,10 @@ export function strandsNeeded(
       const perKN = spread * (1 / area + et * y);
       top[i] = Math.max(0, (-stage * y - stageTension) / (perKN * open.topKN));
     }
-    for (const [state, max, min] of [
-      [open, use.openMax[i]!, use.openMin[i]!],
-      [lasting, use.lastingMax[i]!, use.lastingMin[i]!],
-    ] as const) {
+    for (let k = 0; k < 2; k++) {
+      const state = states[k]!;
+      const max = maxima[k]![i]!;
+      const min = minima[k]![i]!;
       const extra = spread * (state.topParasitic * pt + state.bottomParasitic * pb);
       const t = spread * nt * state.topKN;
       const b = spread * nb * state.bottomKN;
@@ -190,15 +193,15 @@ export function strandsNeeded(
     const websM = model.layout.webs * sections.webM[i]!;
     const lowBars = bars * faceBarsM2(sections.bottomWidthM[i]!);
     // Either end of what creep does to the parasitic moment of the tendons over the piers.
-    const along = [pb, pb + lasting.topParasitic * pt] as const;
-    const hog = Math.max(-(use.ultimateMin[i]! + ultimatePart * Math.min(...along)), -uls.permanent * stage);
+    const crept = pb + lasting.topParasitic * pt;
+    const hog = Math.max(-(use.ultimateMin[i]! + ultimatePart * Math.min(pb, crept)), -uls.permanent * stage);
     if (hog > 0) {
       const face = { widthM: sections.bottomWidthM[i]!, flangeM: model.mostBottomM, websM };
       const c = compressionDepth(model, face, nt * designKN + topBars);
       const rest = hog - topBars * (depth - topCover / 2 - c);
       top[i] = Math.max(top[i]!, rest / (designKN * (depth - topCover - c)));
     }
-    const sag = use.ultimateMax[i]! + ultimatePart * Math.max(...along);
+    const sag = use.ultimateMax[i]! + ultimatePart * Math.max(pb, crept);
     if (sag > 0) {
       const face = { widthM: model.task.deck.widthM, flangeM: model.layout.slab.meanM, websM };
       const c = compressionDepth(model, face, nb * designKN + lowBars);
