@@ -1,6 +1,6 @@
 import { existsSync } from 'node:fs';
 import { resolve } from 'node:path';
-import { chromium, type Browser, type Page } from 'playwright-core';
+import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
 import { build, preview, type PreviewServer } from 'vite';
 import { findChromium } from '../../.config/chromium.mjs';
 
@@ -31,21 +31,27 @@ const quiet = [
   '--disable-sync',
 ];
 
-/** Serves the built site (building it where nobody has yet) and starts the browser. */
-export async function openSite(): Promise<Site> {
-  if (!existsSync(resolve(root, 'dist/option-study.html'))) await build({ configFile, logLevel: 'silent' });
+/** Serves the built site (building it where nobody has yet), or one built elsewhere, and starts the browser. */
+export async function openSite(outDir = resolve(root, 'dist')): Promise<Site> {
+  if (!existsSync(resolve(outDir, 'option-study.html'))) {
+    await build({ configFile, logLevel: 'silent', build: { outDir } });
+  }
   const server: PreviewServer = await preview({
     configFile,
     logLevel: 'silent',
+    build: { outDir },
     preview: { host: '127.0.0.1', port: 0 },
   });
   const address = server.resolvedUrls!.local[0]!;
   const browser: Browser = await chromium.launch({ executablePath: await findChromium(), args: quiet });
+  let last: BrowserContext | undefined;
   return {
     address,
     async open(path, size = { width: 1440, height: 900 }) {
-      const context = await browser.newContext({ viewport: size });
-      const page = await context.newPage();
+      // One page at a time: those of earlier tests would go on working beside this one.
+      await last?.close();
+      last = await browser.newContext({ viewport: size });
+      const page = await last.newPage();
       const heard: Heard = { console: [], elsewhere: [] };
       page.on('console', (message) => heard.console.push(`${message.type()}: ${message.text()}`));
       page.on('pageerror', (error) => heard.console.push(`error: ${error.message}`));
