@@ -1,5 +1,6 @@
 import cables from '../../data/evidence/cables.json';
 import cantileverBox from '../../data/evidence/cantilever-box.json';
+import compositeBox from '../../data/evidence/composite-box.json';
 import compositeI from '../../data/evidence/composite-i.json';
 import loads from '../../data/evidence/loads.json';
 import mechanics from '../../data/evidence/mechanics.json';
@@ -16,6 +17,7 @@ const files: Readonly<Record<string, unknown>> = {
   sections,
   cables,
   'composite-i': compositeI,
+  'composite-box': compositeBox,
   'precast-i': precastI,
   'cantilever-box': cantileverBox,
 };

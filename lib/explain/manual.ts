@@ -7,6 +7,7 @@ import { arrangementFigures } from '../arrange/figures.ts';
 import { standingFigures } from '../decide/figures.ts';
 import { cableFigures } from '../forms/cable-stayed/figures.ts';
 import { cantileverFigures } from '../forms/cantilever-box/figures.ts';
+import { compositeBoxFigures } from '../forms/composite-box/figures.ts';
 import { compositeFigures } from '../forms/composite-i/figures.ts';
 import { boxFigures } from '../forms/concrete-box/figures.ts';
 import { designFigures } from '../forms/figures.ts';
@@ -42,6 +43,7 @@ export const manual: readonly Descriptor[] = [
   ...slabBridgeFigures,
   ...cantileverFigures,
   ...compositeFigures,
+  ...compositeBoxFigures,
   ...boxFigures,
   ...precastManual,
   ...trussFigures,

@@ -1,4 +1,5 @@
 import cableStayed from '../../data/forms/cable-stayed.json';
+import compositeBox from '../../data/forms/composite-box.json';
 import compositeI from '../../data/forms/composite-i.json';
 import concreteBox from '../../data/forms/concrete-box.json';
 import fatigue from '../../data/forms/fatigue.json';
@@ -33,6 +34,7 @@ const files: Readonly<Record<string, unknown>> = {
   plates,
   fatigue,
   'composite-i': compositeI,
+  'composite-box': compositeBox,
   'concrete-box': concreteBox,
   'precast-i': precastI,
   truss,

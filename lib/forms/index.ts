@@ -1,6 +1,7 @@
 import type { FormId } from '../model/index.ts';
 import { cableStayed } from './cable-stayed/index.ts';
 import { cantileverBox } from './cantilever-box/index.ts';
+import { compositeBox } from './composite-box/index.ts';
 import { compositeI } from './composite-i/index.ts';
 import { concreteBox } from './concrete-box/index.ts';
 import type { FormModule } from './formModule.ts';
@@ -15,6 +16,7 @@ export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   slab,
   'precast-i': precastI,
   'composite-i': compositeI,
+  'composite-box': compositeBox,
   'concrete-box': concreteBox,
   'cantilever-box': cantileverBox,
   truss,

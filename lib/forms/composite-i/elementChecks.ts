@@ -125,21 +125,26 @@ export function elementChecks(
           tension = fibre(steelHog, steel, zTop) + fibre(onBars, cracked, zTop);
         }
       }
-      const peak = Math.max(totalHogAt(m, e), totalHogAt(m, e + 1));
-      const drop = peak > 0 ? 1 - Math.max(0, Math.min(totalHogAt(m, e), totalHogAt(m, e + 1))) / peak : 0;
-      const near = Math.max(0.75, 1 - (drop * 0.25 * bracingM) / model.elementM[e]!);
-      const chi = strutReduction(
-        plates.bottomWidthM,
-        tb,
-        plates.webM,
-        cracked.centroidM - zBottom,
-        bracingM,
-        fyBottom,
-      );
-      use.hogBottom = Math.max(use.hogBottom, (-bottom / fyBottom) * buckled(chi, near, gammaM0, gammaM1));
       use.hogTop = Math.max(use.hogTop, (gammaM0 * tension) / fyTop);
       use.bottomMPa = Math.max(use.bottomMPa, -bottom);
       use.topMPa = Math.max(use.topMPa, tension);
+      if (model.plate) {
+        const share = model.plate.pressedShare(tb);
+        use.hogBottom = Math.max(use.hogBottom, (-bottom / fyBottom) * buckled(share, 1, gammaM0, gammaM1));
+      } else {
+        const peak = Math.max(totalHogAt(m, e), totalHogAt(m, e + 1));
+        const drop = peak > 0 ? 1 - Math.max(0, Math.min(totalHogAt(m, e), totalHogAt(m, e + 1))) / peak : 0;
+        const near = Math.max(0.75, 1 - (drop * 0.25 * bracingM) / model.elementM[e]!);
+        const chi = strutReduction(
+          plates.bottomWidthM,
+          tb,
+          plates.webM,
+          cracked.centroidM - zBottom,
+          bracingM,
+          fyBottom,
+        );
+        use.hogBottom = Math.max(use.hogBottom, (-bottom / fyBottom) * buckled(chi, near, gammaM0, gammaM1));
+      }
     }
     const section = inCracked ? cracked : short;
     const range = Math.abs(fibre(equivalentKNm[i]!, section, zBottom));

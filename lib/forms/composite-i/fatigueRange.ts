@@ -45,7 +45,9 @@ export function fatigueLimitMPa(standard: StandardId): number {
 export function fatigueRange(model: GirderModel, beam: LineBeam): Float64Array {
   const vehicle = compositeData.fatigue[model.standardId];
   const scale =
-    vehicle.loadFactor * (1 + vehicle.allowance) * fatigueShare(model.task.deck, model.layout.offsetsM);
+    vehicle.loadFactor *
+    (1 + vehicle.allowance) *
+    (model.plate?.lorryShare ?? fatigueShare(model.task.deck, model.layout.offsetsM));
   const group: AxleGroup = { atM: vehicle.atM, loadKN: vehicle.axlesKN.map((kN) => kN * scale), whole: true };
   const back = reversed(group);
   const symmetrical = back.atM.every((x, i) => Math.abs(x - group.atM[i]!) < 1e-9);

@@ -86,7 +86,7 @@ export function girderLines(model: GirderModel, girder: SizedGirder): MeasuredLi
 }
 
 /** Bars along the deck, kg: one ratio in the cracked stretches over inner supports, another elsewhere. */
-function longitudinalBars(model: GirderModel): number {
+export function longitudinalBars(model: GirderModel): number {
   const { barsOverPiers, barsInSpans } = compositeData;
   const section = model.task.deck.widthM * model.slab.meanM;
   let kg = 0;

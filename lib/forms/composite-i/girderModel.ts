@@ -60,6 +60,22 @@ export interface GirderModel {
   /** Modulus of the steel, kN/m2. */
   readonly modulusKNm2: number;
   yieldMPa(thicknessM: number): number;
+  /** Where the girder is half of a box: its half of the bottom plate. */
+  readonly plate?: BottomPlate;
+}
+
+/** Bottom plate of half a box and what belongs to it. */
+export interface BottomPlate {
+  readonly widthM: number;
+  readonly leastM: number;
+  /** Length of the leaning web over its height. */
+  readonly slant: number;
+  /** Design shear of the web from torsion, kN, by element. */
+  readonly torsionKN: Float64Array;
+  /** Share of a lorry of the outer lane that this half carries. */
+  readonly lorryShare: number;
+  /** Share of the yield stress that the plate may have in compression: buckling between stiffeners and frames, shear lag. */
+  pressedShare(thicknessM: number): number;
 }
 
 /**
@@ -67,16 +83,38 @@ export interface GirderModel {
  * @throws RangeError for an impossible girder count
  */
 export function girderModel(task: UnitTask): GirderModel {
-  const standard = loadStandard(task.standard);
   const layout = girderLayout(task);
+  const curve = curvatureFactor(task, layout);
+  return modelOn(task, layout, curve, {
+    stiff: !layout.twin,
+    even: !layout.twin,
+    trafficOn: (slab, girderM, ratio) => amplified(worstTraffic(task, layout, slab, girderM, ratio), curve),
+  });
+}
+
+/** How girders carry their deck: slab on stiff lines or more than two, of even thickness or not; traffic of the worst of them. */
+export interface Carrying {
+  readonly stiff: boolean;
+  readonly even: boolean;
+  readonly trafficOn: (slab: SlabDesign, girderM: number, modularRatio: number) => TrafficLoad;
+}
+
+/** A girder of any layout: its slab designed across the deck and the loads shared out. `curve` multiplies every load. */
+export function modelOn(
+  task: UnitTask,
+  layout: GirderLayout,
+  curve: number,
+  { stiff, even, trafficOn }: Carrying,
+): GirderModel {
+  const standard = loadStandard(task.standard);
   const slab = designSlab({
     standard: task.standard,
     deck: task.deck,
     direction: 'across',
     spacingM: layout.spacingM,
     overhangM: layout.overhangM,
-    continuous: !layout.twin,
-    uniform: !layout.twin,
+    continuous: stiff,
+    uniform: even,
   });
   const supportsM = supportPositions(task.spansM);
   const elementM = Float64Array.from(
@@ -90,8 +128,7 @@ export function girderModel(task: UnitTask): GirderModel {
     modulusMPa / concrete(task.standard, materials.concreteDefaultMPa[task.standard].slab).ecmMPa;
   const tops = girderTops(task, layout, slab, girderM, modularRatio, modulusMPa);
   const share = task.deck.widthM / layout.count;
-  const curve = curvatureFactor(task, layout);
-  const traffic = amplified(worstTraffic(task, layout, slab, girderM, modularRatio), curve);
+  const traffic = trafficOn(slab, girderM, modularRatio);
   const slabKNm = curve * standard.unitWeights.concreteKNm3 * slab.meanM * share;
   const superimposedKNm = (curve * task.deck.superimposedKNm) / layout.count;
   const thickestM = thickestPlateM(task.standard);

@@ -1,6 +1,4 @@
-import { trafficOnDeck, trafficOnInfluence } from '../../actions/index.ts';
-import { beamTrack, reactionInfluence } from '../../mechanics/index.ts';
-import type { Design, SupportReaction, UnitTask } from '../../model/index.ts';
+import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
@@ -10,8 +8,9 @@ import { girderChecks, heaviestPiece } from './girderChecks.ts';
 import { girderElevation, girderSections } from './girderDrawing.ts';
 import { girderFiguresOf, ownWeightShare } from './girderReport.ts';
 import { girderLines } from './girderLines.ts';
-import { girderModel, type GirderModel } from './girderModel.ts';
-import { sizeGirder, type SizedGirder } from './sizeGirder.ts';
+import { girderModel } from './girderModel.ts';
+import { girderReactions } from './girderReactions.ts';
+import { sizeGirder } from './sizeGirder.ts';
 
 /**
  * Composite I-girders of constant depth: two girders with cross-girders or more girders with bracing, a concrete slab on
@@ -40,7 +39,7 @@ function size(task: UnitTask): Design {
     depthAlong: constantDepth(model.lengthM, depthM),
     elevation: girderElevation(model, girder.run),
     sections: girderSections(model, girder.run, girder.secondary.crossGirderM),
-    reactions: reactionsOf(model, girder),
+    reactions: girderReactions(model, girder),
     checks,
     limitingCheck: limiting(checks),
     ownWeightShare: ownWeightShare(girder),
@@ -49,25 +48,4 @@ function size(task: UnitTask): Design {
     warnings: overLimit(checks, 'plates'),
     figures: girderFiguresOf(model, girder),
   };
-}
-
-/** Characteristic reactions of the whole deck: girders times permanent reactions, all lanes for traffic. */
-function reactionsOf(model: GirderModel, girder: SizedGirder): SupportReaction[] {
-  const { steelStage, superimposed, shrinkage, traffic, shortBeam } = girder.effects;
-  const deck = trafficOnDeck(model.standardId, model.task.deck);
-  const track = beamTrack(shortBeam);
-  return model.supportsM.map((_, j) => {
-    const line = reactionInfluence(shortBeam, j);
-    const whole = trafficOnInfluence(deck, track, line);
-    const one = trafficOnInfluence(model.traffic, track, line);
-    // The envelope of the girder holds what the standard asks for at inner supports; the deck differs by its lanes.
-    const ratio = (all: number, single: number): number => (single === 0 ? 0 : all / single);
-    const permanent = steelStage.reactionKN[j]! + superimposed.reactionKN[j]!;
-    return {
-      permanentKN:
-        (model.layout.count * permanent) / model.curve + model.layout.count * shrinkage.reactionKN[j]!,
-      trafficMaxKN: (traffic.reactionMaxKN[j]! / model.traffic.shearRatio) * ratio(whole.max, one.max),
-      trafficMinKN: (traffic.reactionMinKN[j]! / model.traffic.shearRatio) * ratio(whole.min, one.min),
-    };
-  });
 }

@@ -122,7 +122,7 @@ function crossFrames(model: GirderModel, inner: number): Cross {
 }
 
 /** Design reactions of one girder, kN. */
-function designReactions(model: GirderModel, effects: GirderEffects): number[] {
+export function designReactions(model: GirderModel, effects: GirderEffects): number[] {
   const { uls } = model.standard.factors;
   return model.supportsM.map(
     (_, j) =>
@@ -133,7 +133,7 @@ function designReactions(model: GirderModel, effects: GirderEffects): number[] {
 }
 
 /** Studs of one girder: design longitudinal shear V S / I of the uncracked section along the girder, over one stud. */
-function studsOnGirder(model: GirderModel, run: PlateRun, effects: GirderEffects): number {
+export function studsOnGirder(model: GirderModel, run: PlateRun, effects: GirderEffects): number {
   const { uls } = model.standard.factors;
   const { studs } = compositeData;
   let count = 0;

@@ -28,7 +28,7 @@ export interface SizedGirder {
  * Plates of a girder from its moments, and moments from its plates: stiffness, own weight and plates are brought into
  * agreement, then the result is worked out once more and plates that came out short are thickened.
  */
-export function sizeGirder(model: GirderModel): SizedGirder {
+export function sizeGirder(model: GirderModel, secondaryOf = secondarySteel): SizedGirder {
   const fatigueMPa = fatigueLimitMPa(model.standardId);
   let run = guessRun(model);
   let secondaryKgM = 0.15 * meanKgM(model, run);
@@ -38,7 +38,7 @@ export function sizeGirder(model: GirderModel): SizedGirder {
     const moments = stageMoments(model, effects);
     const webM = sizeWeb(model, run, designShear(model, effects));
     run = flanged(model, { ...run, webM }, moments, equivalentKNm, fatigueMPa, pass === 0);
-    secondaryKgM = secondaryPerM(model, run, effects);
+    secondaryKgM = secondaryPerM(model, run, effects, secondaryOf);
     // Traffic moves little with the stiffness: it is placed on the first guess and on the finished girder.
     effects = girderEffects(model, run, secondaryKgM, pass === 0 ? effects.traffic : undefined);
   }
@@ -48,11 +48,11 @@ export function sizeGirder(model: GirderModel): SizedGirder {
     const next = round < 2 ? thickened(model, run, moments, shearKN, equivalentKNm, fatigueMPa) : run;
     if (sameRun(next, run)) {
       const plateKg = model.layout.count * model.lengthM * meanKgM(model, run);
-      const secondary = secondarySteel(model, run, effects, plateKg);
+      const secondary = secondaryOf(model, run, effects, plateKg);
       return { run, effects, moments, shearKN, equivalentKNm, secondary, plateKg };
     }
     run = next;
-    secondaryKgM = secondaryPerM(model, run, effects);
+    secondaryKgM = secondaryPerM(model, run, effects, secondaryOf);
     effects = girderEffects(model, run, secondaryKgM);
   }
 }
@@ -69,9 +69,10 @@ function guessRun(model: GirderModel): PlateRun {
   const most = Math.max(...areas);
   const { topM: topWidthM, bottomM: bottomWidthM } = flangeWidths(model, 0.7 * most, most);
   const least = flange.leastMm / 1000;
+  const leastBottom = model.plate?.leastM ?? least;
   const thickest = thickestPlateM(model.standardId);
-  const thickness = (area: number, widthM: number): number =>
-    Math.min(thickest, Math.max(least, area / widthM));
+  const thickness = (area: number, widthM: number, leastM: number): number =>
+    Math.min(thickest, Math.max(leastM, area / widthM));
   const webM = roundPlateUp(
     Math.max(web.leastMm[model.standardId] / 1000, model.girderM / web.mostHeightOverThickness.value),
   );
@@ -79,8 +80,8 @@ function guessRun(model: GirderModel): PlateRun {
     heightM: model.girderM,
     topWidthM,
     bottomWidthM,
-    topM: areas.map((area) => thickness(0.7 * area, topWidthM)),
-    bottomM: areas.map((area) => thickness(area, bottomWidthM)),
+    topM: areas.map((area) => thickness(0.7 * area, topWidthM, least)),
+    bottomM: areas.map((area) => thickness(area, bottomWidthM, leastBottom)),
     webM: new Float64Array(elements).fill(Math.min(webM, web.mostMm.value / 1000)),
   };
 }
@@ -165,9 +166,14 @@ function meanKgM(model: GirderModel, run: PlateRun): number {
   return kg / model.lengthM;
 }
 
-function secondaryPerM(model: GirderModel, run: PlateRun, effects: GirderEffects): number {
+function secondaryPerM(
+  model: GirderModel,
+  run: PlateRun,
+  effects: GirderEffects,
+  secondaryOf: typeof secondarySteel,
+): number {
   const plateKg = model.layout.count * model.lengthM * meanKgM(model, run);
-  return secondarySteel(model, run, effects, plateKg).totalKg / (model.layout.count * model.lengthM);
+  return secondaryOf(model, run, effects, plateKg).totalKg / (model.layout.count * model.lengthM);
 }
 
 /** Station in the middle of each span. */

@@ -14,7 +14,9 @@ import type { StageMoments } from './stageMoments.ts';
 export function designShear(model: GirderModel, effects: GirderEffects): Float64Array {
   const { uls } = model.standard.factors;
   const { steelStage, superimposed, shrinkage, traffic } = effects;
+  const slant = model.plate?.slant ?? 1;
   return Float64Array.from(model.elementM, (_, e) => {
+    const torsion = model.plate?.torsionKN[e] ?? 0;
     const right =
       uls.permanent * steelStage.shearRightKN[e]! +
       uls.superimposed * superimposed.shearRightKN[e]! +
@@ -24,19 +26,20 @@ export function designShear(model: GirderModel, effects: GirderEffects): Float64
       uls.superimposed * superimposed.shearLeftKN[e + 1]! +
       shrinkage.shearLeftKN[e + 1]!;
     const q = uls.traffic;
-    return Math.max(
+    const upright = Math.max(
       Math.abs(right + q * traffic.shearMaxKN[e]!),
       Math.abs(right + q * traffic.shearMinKN[e]!),
       Math.abs(left + q * traffic.shearMaxKN[e + 1]!),
       Math.abs(left + q * traffic.shearMinKN[e + 1]!),
     );
+    return slant * upright + torsion;
   });
 }
 
 /** Shear resistance of a web of one element, kN; stiffened at the bracings. */
 export function webCapacityKN(model: GirderModel, e: number, webM: number, heightM: number): number {
   return webShearCapacity({
-    depthM: heightM,
+    depthM: heightM * (model.plate?.slant ?? 1),
     thicknessM: webM,
     fyMPa: model.yieldMPa(webM),
     panelLengthM: model.bracingM[e]!,
@@ -50,7 +53,8 @@ export function sizeWeb(model: GirderModel, run: PlateRun, shearKN: Float64Array
   const rolled = plateThicknessesMm.map((mm) => mm / 1000).filter((t) => t <= web.mostMm.value / 1000);
   const need = Float64Array.from(shearKN, (v, e) => {
     const height = model.girderM - run.topM[e]! - run.bottomM[e]!;
-    const least = Math.max(web.leastMm[model.standardId] / 1000, height / web.mostHeightOverThickness.value);
+    const longM = height * (model.plate?.slant ?? 1);
+    const least = Math.max(web.leastMm[model.standardId] / 1000, longM / web.mostHeightOverThickness.value);
     const fits = rolled.find(
       (t) => t >= least - 1e-9 && v <= bendingShear.most * webCapacityKN(model, e, t, height),
     );
@@ -78,6 +82,7 @@ export function flangeWidths(
       flange.mostWidthM,
       Math.max(least, Math.sqrt(flange.widthOverThickness * area), area / thickestPlateM(model.standardId)),
     );
+  if (model.plate) return { topM: roundWidthUp(width(topAreaM2)), bottomM: model.plate.widthM };
   const bottomM = roundWidthUp(width(bottomAreaM2));
   const topM = Math.min(
     bottomM,
@@ -108,6 +113,7 @@ export function flangeNeeds(
   const top = new Float64Array(elements);
   const bottom = new Float64Array(elements);
   const least = compositeData.flange.leastMm / 1000;
+  const leastBottom = model.plate?.leastM ?? least;
   const plates = {
     heightM: run.heightM,
     topWidthM: run.topWidthM,
@@ -126,13 +132,13 @@ export function flangeNeeds(
       const wantBottom = Math.max(use.sagBottom, use.hogBottom, use.service, use.fatigueBottom) / aim;
       const before = plates.topM + plates.bottomM;
       plates.topM = moved(plates, plates.topM, plates.topWidthM, wantTop, least, most);
-      plates.bottomM = moved(plates, plates.bottomM, plates.bottomWidthM, wantBottom, least, most);
+      plates.bottomM = moved(plates, plates.bottomM, plates.bottomWidthM, wantBottom, leastBottom, most);
       // Outstands of compressed flanges stay in class 3 at the stress they carry.
       plates.topM = Math.max(
         plates.topM,
         leastFlangeM(plates.topWidthM, plates.webM, use.castTop * model.yieldMPa(plates.topM)),
       );
-      if (use.hogBottom > 0)
+      if (use.hogBottom > 0 && !model.plate)
         plates.bottomM = Math.max(
           plates.bottomM,
           leastFlangeM(plates.bottomWidthM, plates.webM, use.hogBottom * model.yieldMPa(plates.bottomM)),
