@@ -3,7 +3,7 @@ import { fixed } from '../../format.ts';
 import { h, type HtmlChild } from '../../html.ts';
 import { putAt, standing, type Fields, type Path, type StudyStore } from '../../page/index.ts';
 import type { Graph } from '../../reactive/index.ts';
-import { listAction, saidBelow } from './fieldTable.ts';
+import { listAction, saidBelow, sayIn } from './fieldTable.ts';
 import { withEntry, withoutEntry } from './listEdits.ts';
 import { pastedProfile } from './pastedProfile.ts';
 import { problemBeside } from './problemBeside.ts';
@@ -112,11 +112,18 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
     build({ brief }, fields): HtmlChild {
       const { ground } = brief.crossing;
       if (ground.length > MOST_SHOWN) {
-        return h(
-          'p',
-          {},
-          `${ground.length} points from ${fixed(ground[0]!.chainageM, 1)} to ${fixed(ground.at(-1)!.chainageM, 1)}: too many to set out. Change them where they come from and paste them again.`,
-        );
+        const said = h('p', { class: 'refusal', role: 'status' });
+        const ends = [0, ground.length - 1].map((index): Path => [...list, index, 'chainageM']);
+        fields.follow(ends, (_, problems) => sayIn(said, problems.map(problemBeside).join(' ')));
+        const [fromM, toM] = [ground[0]!.chainageM, ground.at(-1)!.chainageM];
+        return [
+          h(
+            'p',
+            {},
+            `${ground.length} points from ${fixed(fromM, 1)} to ${fixed(toM, 1)}: too many to set out. Change them where they come from and paste them again.`,
+          ),
+          said,
+        ];
       }
       const set = h(
         'ol',
