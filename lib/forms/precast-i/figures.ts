@@ -1,9 +1,9 @@
 import { described, type At, type Descriptor } from '../../model/index.ts';
 import { formManual, linesOf, spansOf } from '../common/formManual.ts';
-import { slabCheckFigures } from '../common/slab/slabFigures.ts';
+import { precastCheckFigures } from './checkFigures.ts';
+import { staticsFigures } from './staticsFigures.ts';
 
-const manual = formManual('precast-i');
-const { figure, sized, line, check } = manual;
+const { figure, sized, line } = formManual('precast-i');
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 const bars = [
@@ -30,128 +30,6 @@ const perM2 = (name: string, label: string, unit: string, formula: string, ...wh
   });
 const shape = (name: string, label: string, unit: string): Descriptor =>
   sized(name, label, unit, 'outline of the beam that was chosen', 'beamHeightM', './task/depthM');
-
-const statics: readonly Descriptor[] = [
-  figure(/^span\d+DesignKNm$/u, {
-    label: (at) => `design moment at the middle of ${at.name('figure').replace(/^span(\d+).*$/u, 'span $1')}`,
-    unit: 'kNm',
-    method: 'combination',
-    formula: 'gamma G own weight and slab + gamma superimposed + gamma Q traffic',
-    inputs: (at) => {
-      const start = `${at.unit}/figures/${at.name('figure').replace('DesignKNm', '')}`;
-      const { standard } = at.design.task;
-      return {
-        simple: `${start}SimpleKNm`,
-        superimposed: `${start}SuperimposedKNm`,
-        traffic: `${start}TrafficKNm`,
-        permanentFactor: `data/${standard}/factors/uls/permanent`,
-        superimposedFactor: `data/${standard}/factors/uls/superimposed`,
-        trafficFactor: `data/${standard}/factors/uls/traffic`,
-      };
-    },
-    compute: (v) =>
-      v.permanentFactor * v.simple + v.superimposedFactor * v.superimposed + v.trafficFactor * v.traffic,
-  }),
-  sized(
-    'span*SimpleKNm',
-    'own weight, slab and diaphragms at the middle of span *, the span by itself',
-    'kNm',
-    'w L2 / 8 and point loads of the diaphragms',
-    'spans',
-    'ownKNm',
-    'wetKNm',
-  ),
-  sized(
-    'span*SuperimposedKNm',
-    'superimposed load at the middle of span *, the span by itself',
-    'kNm',
-    'w L2 / 8',
-    'spans',
-    'superimposedKNm',
-  ),
-  sized(
-    'span*TrafficKNm',
-    'traffic at the middle of span *, the span by itself',
-    'kNm',
-    'axles and lane load of the beam at their worst place',
-    'spans',
-    'laneVehicles',
-    'trafficUniformKNm',
-  ),
-  sized(
-    'span*ShearDesignKN',
-    'greatest design shear of a beam in span *',
-    'kN',
-    'own weight on the span by itself, the rest on it or on the continuous beam, less what draped strands carry',
-    'spans',
-    'laneVehicles',
-    'span#Strands',
-  ),
-  sized(
-    'span*Strands',
-    'strands of a beam in span *',
-    'no',
-    'fewest pairs that hold in service after losses and at ultimate',
-    'span#SimpleKNm',
-    'span#SuperimposedKNm',
-    'span#TrafficKNm',
-    'beamHeightM',
-    'data/precast-i/service/tensionMPa/:standard',
-  ),
-  sized(
-    'span*RelievedStrands',
-    'strands debonded or draped at the ends in span *',
-    'no',
-    'fewest that the ends can stand at release',
-    'span#Strands',
-    'data/precast-i/relief/mostShare/:standard',
-  ),
-  sized(
-    'span*TopStrands',
-    'strands in the top flange in span *',
-    'no',
-    'fewest pairs that hold the top of the beam at release',
-    'span#Strands',
-    'data/precast-i/strand/mostTop',
-  ),
-  sized(
-    'span*StrandHeightM',
-    'centroid of the strands above the soffit in span *',
-    'm',
-    'rows of the strand grid filled from the bottom',
-    'span#Strands',
-    'data/precast-i/strand/pitchM/:standard',
-    'data/precast-i/strand/axisM/:standard',
-  ),
-  sized(
-    'span*LossesMPa',
-    'losses of the strands in span *',
-    'MPa',
-    'elastic shortening, shrinkage, creep and relaxation at midspan',
-    'span#Strands',
-    'ownKNm',
-    'data/precast-i/strand/jacking/:standard',
-  ),
-  sized(
-    'pier*HogDesignKNm',
-    'design moment of a beam over pier *',
-    'kNm',
-    'superimposed load and traffic on the continuous beam',
-    'spans',
-    'superimposedKNm',
-    'laneVehicles',
-    'trafficUniformKNm',
-  ),
-  sized(
-    'pier*BarsM2',
-    'bars in the slab over pier *, of one beam',
-    'm2',
-    'M / (z fyd) at ultimate or M / (z sigma) in service, whichever is more',
-    'pier#HogDesignKNm',
-    'data/precast-i/continuity/barAxisM',
-    'data/slab/serviceStressMPa/:standard',
-  ),
-];
 
 /** Precast beams: layout, section, strands and quantities, their checks. Figures are of one beam unless named otherwise. */
 export const precastManual: readonly Descriptor[] = [
@@ -341,7 +219,7 @@ export const precastManual: readonly Descriptor[] = [
   ),
   perM2('strandKgM2', 'strand per m2 of deck', 'kg/m2', 'strand', 'strand in beams'),
   perM2('barsKgM2', 'bars per m2 of deck', 'kg/m2', 'all bars', ...bars),
-  ...statics,
+  ...staticsFigures,
   line('bars along the beams', {
     label: 'bars along the beams',
     unit: 'kg',
@@ -358,85 +236,5 @@ export const precastManual: readonly Descriptor[] = [
     inputs: (at) => ({ ratio: 'data/precast-i/diaphragm/barsKgM3', concrete: linesOf(at, 'diaphragms') }),
     compute: ({ ratio, concrete }) => ratio * sum(concrete),
   }),
-  ...check(
-    'service-tension',
-    [
-      'M1 / Wb of the beam + M2 / Wb of beam and slab, service share of traffic',
-      'span*SimpleKNm',
-      'span*TrafficKNm',
-    ],
-    [
-      'P (1 / A + e / Wb) after losses + tension allowed',
-      'span*Strands',
-      'span*LossesMPa',
-      'data/precast-i/service/tensionMPa/:standard',
-    ],
-    'EN 1992-2, AASHTO LRFD 5.9.2.3 (from memory)',
-  ),
-  ...check(
-    'service-compression',
-    ['stress of the top of the beam under everything, characteristic', 'span*SimpleKNm', 'span*Strands'],
-    ['share of the cylinder strength', 'data/precast-i/service/compression/:standard'],
-  ),
-  ...check(
-    'bending',
-    ['greatest design moment against its resistance', 'span*DesignKNm'],
-    ['strands at their design strength against a stress block in the slab', 'span*Strands', 'slabM'],
-    'EN 1992-1-1 6.1, AASHTO LRFD 5.6.3 (from memory)',
-  ),
-  ...check(
-    'release-top',
-    ['P (e / Wt - 1 / A) - M / Wt at release', 'span*Strands', 'span*TopStrands'],
-    [
-      'tension with bars, by the root of the strength at release',
-      'data/precast-i/release/tensionRootMPa/:standard',
-    ],
-  ),
-  ...check(
-    'release-bottom',
-    ['P (1 / A + e / Wb) - M / Wb at release', 'span*Strands', 'span*RelievedStrands'],
-    ['share of the strength at release', 'data/precast-i/release/compression/:standard'],
-  ),
-  ...check(
-    'web-struts',
-    ['shear over the strength of the struts', 'span*ShearDesignKN', 'webM'],
-    ['all of it'],
-  ),
-  ...check(
-    'web-links',
-    ['links asked for over those that fit', 'span*ShearDesignKN', 'webM'],
-    ['all of them'],
-  ),
-  ...check(
-    'deflection',
-    ['deflection of the longest span under traffic on the continuous beam', 'compositeInertiaM4', 'spans'],
-    ['span over the limit of the standard', 'spans', 'data/:standard/deflection/limitRatio'],
-  ),
-  ...check(
-    'lifting',
-    ['least safety', 'data/precast-i/lifting/leastSafety'],
-    ['safety of the longest beam while it hangs', 'liftingSafety'],
-    'Mast, PCI Journal 1989 and 1993 (from memory)',
-  ),
-  ...check(
-    'hauled-length',
-    ['longest beam', 'spans'],
-    ['longest that is hauled', 'data/precast-i/haul/lengthM'],
-  ),
-  ...check(
-    'hauled-mass',
-    ['weight of a beam x its length', 'ownKNm', 'spans'],
-    ['heaviest that is hauled', 'data/precast-i/haul/massT'],
-  ),
-  ...check(
-    'pier-bars',
-    ['bars over the area of the slab that acts with a beam', 'pier*BarsM2', 'slabM', 'spacingM'],
-    ['most bars that can be placed', 'data/precast-i/continuity/mostRatio'],
-  ),
-  ...check(
-    'pier-compression',
-    ['depth of the stress block at the soffit over one and a half bottom flanges', 'pier*HogDesignKNm'],
-    ['all of it'],
-  ),
-  ...slabCheckFigures(manual, 'slabM'),
+  ...precastCheckFigures,
 ];
