@@ -7,7 +7,6 @@ import type { FigureWalk } from './figureWalk.ts';
 import { figureWalk } from './figureWalk.ts';
 import { valueWords } from './figureValue.ts';
 import { frames } from './frames.ts';
-import { lateness } from './lateness.ts';
 
 export type { Ask } from './figureChain.ts';
 
@@ -25,6 +24,9 @@ interface Host {
   readonly walk: FigureWalk | null;
   open: { readonly chain: ChainView; readonly asked: string } | null;
 }
+
+/** Pause in drawing after which figures are counted anew, ms. */
+const PAUSE_MS = 150;
 
 const FIGURES = '[data-figure]';
 
@@ -52,14 +54,14 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
   const listening = new AbortController();
   const { signal } = listening;
   let ask: Ask | null = null;
+  let isPending = false;
 
   const figuresOf = (host: Element): Element[] => Array.from(host.querySelectorAll(FIGURES)).filter(isSeen);
 
   const show = (): void => {
     if (ask === null) return;
-    for (const { open } of hosts.values()) open?.chain.show(ask, late.isLate());
+    for (const { open } of hosts.values()) open?.chain.show(ask, isPending);
   };
-  const late = lateness(show);
 
   const mark = ({ element, open }: Host): void => {
     for (const one of element.querySelectorAll('.asked')) one.classList.remove('asked');
@@ -119,7 +121,7 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
     });
     host.open = { chain, asked };
     host.box.append(chain.element);
-    chain.show(ask, late.isLate());
+    chain.show(ask, isPending);
     mark(host);
     chain.focus();
     chain.element.scrollIntoView({ block: 'nearest' });
@@ -167,32 +169,41 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
     { signal },
   );
 
-  const update = (): void => {
-    for (const cell of sheet.querySelectorAll('.cell')) {
-      const host = hostOf(cell);
-      host.walk?.update();
-    }
-    for (const host of hosts.values()) mark(host);
+  const redrawn = new Set<Element>();
+  let timer: ReturnType<typeof setTimeout> | undefined;
+  /** What the keyboard can walk is found out once drawing has paused: telling what is seen costs the page a layout. */
+  const walkAgain = (): void => {
+    for (const cell of redrawn) hostOf(cell).walk?.update();
+    redrawn.clear();
+  };
+  const markOpen = (): void => {
+    for (const host of hosts.values()) if (host.open !== null) mark(host);
   };
   const drawn = new MutationObserver((records) => {
-    const isDrawing = records.some(
-      ({ target }) => target instanceof Element && target.closest('.body, .notes, .live') !== null,
-    );
-    if (isDrawing) queue.request(update);
+    for (const { target } of records) {
+      const part = target instanceof Element ? target.closest('.body, .notes, .live') : null;
+      if (part === null) continue;
+      queue.request(markOpen);
+      const cell = part.closest('.cell');
+      if (cell !== null) redrawn.add(cell);
+      clearTimeout(timer);
+      timer = setTimeout(walkAgain, PAUSE_MS);
+    }
   });
   drawn.observe(sheet, { childList: true, subtree: true });
-  update();
+  for (const cell of sheet.querySelectorAll('.cell')) redrawn.add(cell);
+  walkAgain();
 
   return {
-    set(next, isPending) {
+    set(next, pending) {
       ask = next ?? ask;
-      late.set(isPending);
+      isPending = pending;
       show();
     },
     end() {
       listening.abort();
       drawn.disconnect();
-      late.end();
+      clearTimeout(timer);
     },
   };
 }
