@@ -4,7 +4,8 @@ import { designSlab } from '../common/slab/designSlab.ts';
 import { beamCounts, beamLayout } from './beamLayout.ts';
 import { beamsFor } from './beamShapes.ts';
 import { precastData } from './precastData.ts';
-import { heaviestVehicleKN, type BeamChoice } from './precastModel.ts';
+import type { BeamChoice } from './beamChoice.ts';
+import { heaviestVehicleKN } from './precastModel.ts';
 import { strandCentroidM, mostStrands } from './strandRows.ts';
 
 /** A choice with what it is expected to cost, in m3 of concrete per m of deck with strand counted as concrete. */

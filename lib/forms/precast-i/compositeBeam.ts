@@ -1,7 +1,7 @@
 import { sectionProperties } from '../../mechanics/index.ts';
 import type { UnitTask } from '../../model/index.ts';
 import { precastData } from './precastData.ts';
-import type { BeamChoice } from './precastModel.ts';
+import type { BeamChoice } from './beamChoice.ts';
 
 /** Beam with its part of the slab, transformed to the concrete of the beam. Heights m above the soffit. */
 export interface CompositeBeam {

@@ -13,21 +13,11 @@ import {
 } from '../../actions/index.ts';
 import { imposedCurvature, lineBeam, uniform, type Effects, type LineBeam } from '../../mechanics/index.ts';
 import type { StandardId, UnitTask } from '../../model/index.ts';
-import type { SlabDesign } from '../common/slab/designSlab.ts';
 import { supportPositions } from '../common/supports.ts';
 import type { BeamLayout } from './beamLayout.ts';
-import type { BeamShape } from './beamShapes.ts';
+import type { BeamChoice } from './beamChoice.ts';
 import { compositeBeam, type CompositeBeam } from './compositeBeam.ts';
 import { precastData } from './precastData.ts';
-
-/** What is laid down before the strands are sought: beams across the deck, their shape, the slab on them. */
-export interface BeamChoice {
-  readonly layout: BeamLayout;
-  readonly shape: BeamShape;
-  readonly slab: SlabDesign;
-  /** Fill between beam and slab, m. */
-  readonly haunchM: number;
-}
 
 /** Everything about the beam that carries most, by which all beams are made. */
 export interface PrecastModel extends BeamChoice {
