@@ -1,7 +1,8 @@
+import { ofOption } from '../drawing/asked.ts';
 import { ladder } from '../drawing/ladder.ts';
 import { fixed, level } from '../format.ts';
 import { h } from '../html.ts';
-import type { LineSection, Sheet } from '../page/index.ts';
+import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
 
 /** Section 4: what stands between the deciding obstacle and the road. */
@@ -11,8 +12,19 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
     const option = v.reference;
     if (!option?.headroom) return 'Nothing has to be kept clear.';
     const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
-    const lifted = rise > 0.005 ? `the road rises ${level(rise)} m for it` : 'the road stays where it is';
-    return `${level(option.depthM.midspan)} m of structure leaves ${level(option.headroom.spareM)} m spare; ${lifted}.`;
+    const end = option.profile.startRiseM === rise ? 'start' : 'end';
+    const lifted =
+      rise > 0.005
+        ? ['the road rises ', workedFigure(ofOption(option, `profile/${end}RiseM`), level(rise)), ' m for it']
+        : 'the road stays where it is';
+    return [
+      workedFigure(ofOption(option, 'depthM/midspan'), level(option.depthM.midspan)),
+      ' m of structure leaves ',
+      workedFigure(ofOption(option, 'headroom/spareM'), level(option.headroom.spareM)),
+      ' m spare; ',
+      lifted,
+      '.',
+    ];
   });
   return page.section(4, 'Depth and level', finding, [
     page.cell({
@@ -32,7 +44,16 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
       },
       notes: (v) =>
         v.reference?.headroom && [
-          h('p', {}, `At chainage ${fixed(v.reference.headroom.chainageM, 0)}, where least is left.`),
+          h(
+            'p',
+            {},
+            'At chainage ',
+            workedFigure(
+              ofOption(v.reference, 'headroom/chainageM'),
+              fixed(v.reference.headroom.chainageM, 0),
+            ),
+            ', where least is left.',
+          ),
           h(
             'p',
             {},

@@ -1,10 +1,11 @@
 import { checkBars, checkTable } from '../charts/checkBars.ts';
 import { tableBehind } from '../charts/table.ts';
+import { ofOption } from '../drawing/asked.ts';
 import { section } from '../drawing/section.ts';
 import { mainDesign, mainDesignPath, sectionRow } from '../drawing/sectionRow.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
-import type { LineSection, Sheet } from '../page/index.ts';
+import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
 import { firstOfEachForm } from './words.ts';
 
@@ -13,7 +14,14 @@ export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
   const { appraisal, reference } = cells;
   const finding = page.live({ reference }, (v) =>
     v.reference
-      ? `Option ${v.reference.number} is governed by ${v.reference.limitingCheck.label}, ${fixed(v.reference.limitingCheck.utilisation, 2)}.`
+      ? [
+          `Option ${v.reference.number} is governed by ${v.reference.limitingCheck.label}, `,
+          workedFigure(
+            ofOption(v.reference, 'limitingCheck/utilisation'),
+            fixed(v.reference.limitingCheck.utilisation, 2),
+          ),
+          '.',
+        ]
       : '',
   );
   return page.section(5, 'Section', finding, [
