@@ -5,6 +5,7 @@ import { drawn } from './drawn.ts';
 import type { Memory } from './memory.ts';
 import { requestFor } from './requestFor.ts';
 import { workbench } from './workbench.ts';
+import { mainUnit } from './workOption.ts';
 
 /** An option as it stood, worked out again for a study that has changed since. */
 export interface KeptAppraisal {
@@ -27,23 +28,36 @@ function between({ startM, endM }: Site, units: readonly Unit[]): Unit[] | null 
   return rises ? moved : null;
 }
 
+/** Depth of each unit, m: the main unit as typed, the others and an untyped one as they were. */
+function depthsOf(units: readonly Unit[], before: AppraisedOption, typedM: number | null): number[] {
+  const { depthM } = before.designs[before.units.indexOf(mainUnit(before.units))]!.task;
+  return units.map(({ role, form }, k) => {
+    if (role === 'main') return typedM ?? depthM;
+    const isLike = (unit: Unit | undefined): boolean => unit?.role === role && unit.form === form;
+    const like = isLike(before.units[k]) ? k : before.units.findIndex(isLike);
+    return before.designs[like]?.task.depthM ?? depthM;
+  });
+}
+
 /**
- * Works out one option of an earlier appraisal for the study as it is now, its arrangement and depths frozen: what a page
- * shows while a figure is dragged, before the search has answered. Price and checks are those of the pipeline. A brief that
- * forbids the arrangement says why and throws nothing.
+ * Works out one option of an earlier appraisal for the study as it is now: as the study keeps it, or else as it stood, with
+ * its arrangement and depths frozen. It is what a page shows while a figure is dragged, before the search has answered.
+ * Price and checks are those of the pipeline. A brief that forbids the arrangement says why and throws nothing.
  *
  * @throws RangeError on books that cannot be drawn
  */
 export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory): KeptAppraisal {
-  const { number, form, method, designs, depthM } = before;
   const bench = workbench(study, kept);
   const { site } = bench;
-  const units = between(site, before.units);
+  const own = study.options.kept.find(({ number }) => number === before.number);
+  const { number, form, method } = own ?? before;
+  const units = between(site, (own ?? before).units);
   if (units === null) return { option: null, faults: ['a support would stand beyond an abutment'] };
-  const option: Option = { number, form, method, units, depthM: depthM.midspan, origin: 'kept' };
+  const depthsM = depthsOf(units, before, own?.depthM ?? null);
+  const depthM = depthsM[units.indexOf(mainUnit(units))]!;
+  const option: Option = { number, form, method, units, depthM, origin: 'kept' };
   const onDraws = drawn(bench, [...new Set(units.map((unit) => unit.form))]);
   const faults = faultsOf(units, requestFor(option, site), site);
-  const depthsM = designs.map((design) => design.task.depthM);
   try {
     return { option: appraiseOptionAt(bench, onDraws, option, depthsM).option, faults };
   } catch (error) {

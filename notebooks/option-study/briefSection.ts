@@ -3,6 +3,7 @@ import { crossing } from '../drawing/crossing.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
+import { asItStandsNote } from './asItStandsNote.ts';
 import { briefSentences } from './brief/briefSentences.ts';
 import { deckField } from './brief/deckField.ts';
 import { groundTable } from './brief/groundTable.ts';
@@ -26,7 +27,7 @@ const presetNotes = ({ obstacles }: Brief): HtmlChild =>
 
 /** Section 1: the brief in prose, drawing and tables, each figure changed where it stands. */
 export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
-  const { brief, site, reference } = cells;
+  const { brief, books, site, reference, asItStands } = cells;
   return page.section(
     1,
     'Brief',
@@ -50,7 +51,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
       page.cell({
         station: '1+020',
         title: 'Crossing',
-        shows: { site, brief, reference },
+        shows: { site, brief, books, reference, asItStands },
         owns: [site],
         body: (v, room) =>
           crossing({
@@ -61,7 +62,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
             prefix: 'crossing',
           }),
         notes: (v) => [
-          v.reference && h('p', {}, `Drawn with option ${v.reference.number}, the reference.`),
+          asItStandsNote(v.asItStands, v.books.currency),
           h(
             'p',
             {},

@@ -7,6 +7,7 @@ import { tableBehind } from '../charts/table.ts';
 import { h } from '../html.ts';
 import { pushed, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
+import { asItStandsNote } from './asItStandsNote.ts';
 import { madeFigure } from './madeFigure.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
@@ -33,7 +34,7 @@ function withSteelRate(study: Study, p50: number): Study {
 
 /** Section 7: cost by part, intervals against the budget with what cannot be separated, odds of every pair. */
 export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
-  const { appraisal, reference, brief, books } = cells;
+  const { appraisal, asItStands, reference, brief, books } = cells;
   const finding = page.live({ appraisal }, (v) => {
     const { groups } = v.appraisal.standing;
     const level = groups.filter((group) => group.length > 1).length;
@@ -58,7 +59,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
     page.cell({
       station: '7+005',
       title: 'Rates',
-      shows: { books },
+      shows: { books, asItStands },
       body: h(
         'p',
         { class: 'prose' },
@@ -75,7 +76,8 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
         }),
         ` ${store.valid().books.currency}/kg; low and high move with it.`,
       ),
-      notes: [
+      notes: (v) => [
+        asItStandsNote(v.asItStands, v.books.currency),
         h(
           'p',
           { class: 'caution' },

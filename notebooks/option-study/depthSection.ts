@@ -10,7 +10,8 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
   const { site, brief, reference } = cells;
   const finding = page.live({ reference }, (v) => {
     const option = v.reference;
-    if (!option?.headroom) return 'Nothing has to be kept clear.';
+    if (!option) return '';
+    if (!option.headroom) return 'Nothing has to be kept clear.';
     const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
     const end = option.profile.startRiseM === rise ? 'start' : 'end';
     const lifted =
@@ -33,12 +34,13 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
       shows: { site, brief, reference },
       body: (v) => {
         const option = v.reference;
-        const at = option?.headroom?.chainageM;
+        if (!option) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
+        const at = option.headroom?.chainageM;
         const obstacle = v.brief.obstacles.find(
           ({ clearance }) =>
             clearance && at !== undefined && at >= clearance.fromM - 0.5 && at <= clearance.toM + 0.5,
         );
-        if (!option || !obstacle)
+        if (!obstacle)
           return h('p', { class: 'prose' }, 'The flood decides, or nothing has to be kept clear.');
         return ladder({ site: v.site, option, obstacle, prefix: 'ladder' });
       },

@@ -31,7 +31,7 @@ export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
       shows: { reference },
       body: (v, room) => {
         const design = v.reference && mainDesign(v.reference);
-        if (!v.reference || !design) return h('p', { class: 'prose' }, 'No option has been worked out.');
+        if (!v.reference || !design) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
         const checks = {
           form: v.reference.form,
           checks: design.checks,

@@ -1,4 +1,4 @@
-import { formFacts, guide, survey } from '../../lib/index.ts';
+import { appraiseKept, formFacts, guide, memory, survey } from '../../lib/index.ts';
 import type { Appraisal, AppraisedOption, RegisterEntry, Study } from '../../lib/index.ts';
 import { share, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
@@ -7,9 +7,34 @@ import type { Appraiser } from '../worker/index.ts';
 /** What the sections of the option study show, and how each hangs on the slices of the study. */
 export type StudyCells = ReturnType<typeof studyCells>;
 
+/** An appraisal and the study it answers. */
+interface Answer {
+  readonly asked: Study;
+  readonly appraisal: Appraisal;
+}
+
+/** The reference option for the study as it is now. */
+export interface AsItStands {
+  /** Null before the first appraisal, and where it cannot be worked out for this study. */
+  readonly option: AppraisedOption | null;
+  /** Why it may not stand as it is. */
+  readonly faults: readonly string[];
+  /** True while the search has not answered: arrangement and depths are those it had before. */
+  readonly isFrozen: boolean;
+}
+
+const nobody: AsItStands = { option: null, faults: [], isFrozen: false };
+
+/** The option asked for, or the leader, or the cheapest where no rule lets any in. */
+function referenceIn({ options, standing }: Appraisal, asked: number | null): AppraisedOption | undefined {
+  const wanted = asked ?? standing.leader;
+  return options.find((option) => option.number === wanted) ?? options[0];
+}
+
 /**
  * The cells behind the page. The appraisal is worked out off the page's thread from the brief, the books and the
- * options; the reference is a view setting and works nothing out anew.
+ * options; the reference is a view setting and works nothing out anew. Until the appraisal of an edit has come the reference
+ * is worked out on the page's own thread as it stood, so that its drawing, headroom, price and check follow a drag.
  *
  * Numbers given once are kept here for the life of the page and come back with `register()` when the study is saved.
  */
@@ -31,6 +56,8 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     });
     return before;
   });
+  const last = graph.input<Answer | null>('last answer', null);
+  let answered: Study | undefined;
   const appraisal = graph.slow(
     'appraisal',
     { asked },
@@ -38,14 +65,23 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
       const numbered = { ...v.asked, options: { ...v.asked.options, register } };
       const result = await worker.appraise(numbered, run);
       register = result.register;
+      answered = v.asked;
       return result;
     },
-    { policy: 'progress' },
+    { policy: 'latest' },
   );
-  const reference = graph.cell('reference', { options, appraisal }, (v): AppraisedOption | null => {
-    const wanted = v.options.reference ?? v.appraisal.standing.leader;
-    return v.appraisal.options.find((option) => option.number === wanted) ?? v.appraisal.options[0] ?? null;
+  graph.watch(appraisal, (state) => {
+    if (state.state === 'ready' && answered) graph.set(last, { asked: answered, appraisal: state.value });
   });
+  const kept = memory();
+  const asItStands = graph.cell('as it stands', { options, asked, last }, (v): AsItStands => {
+    if (v.last === null) return nobody;
+    const before = referenceIn(v.last.appraisal, v.options.reference);
+    if (before === undefined) return nobody;
+    if (v.last.asked === v.asked) return { option: before, faults: [], isFrozen: false };
+    return { ...appraiseKept(v.asked, before, kept), isFrozen: true };
+  });
+  const reference = graph.cell('reference', { asItStands }, (v) => v.asItStands.option);
   const spanning = graph.cell('spanning', { site }, (v) => {
     const { mainSpanM } = formFacts(v.site);
     if (typeof mainSpanM !== 'number') return null;
@@ -58,5 +94,5 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
         : {}),
     });
   });
-  return { brief, books, site, asked, appraisal, reference, spanning, register: () => register };
+  return { brief, books, site, asked, appraisal, asItStands, reference, spanning, register: () => register };
 }

@@ -76,6 +76,9 @@ const clock = (date: Date): string =>
     .map((part) => String(part).padStart(2, '0'))
     .join(':');
 
+/** How far outside the screen a cell still counts as on it. */
+const NEAR = '25%';
+
 /** What a slow run says of itself: 'being worked out: 120 of 480, sizing spans'. */
 const progressWords = (progress: Progress | undefined): string =>
   progress === undefined
@@ -118,6 +121,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   let drawnAt: Date | undefined;
   /** Width of the body as last observed: to ask for it between drawings would lay the whole page out each time. */
   let bodyPx = 0;
+  /** Whether it is on the screen or about to be. */
+  let isNear = true;
   let isOwed = false;
   let bodyError: unknown;
   let paper: Room | null = null;
@@ -182,7 +187,12 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     if (status.textContent !== words) status.textContent = words;
   };
 
+  /** While something is dragged the screen belongs to what is seen on it; the rest is drawn on release. */
+  const canWait = (): boolean =>
+    !isNear && paper === null && document.documentElement.classList.contains('dragging');
+
   const update = (): void => {
+    if (canWait()) return updateSoon();
     draw();
     const now = stationState();
     element.dataset['state'] = now;
@@ -224,7 +234,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
         if (cell.kind !== 'slow') continue;
         const watch = (one: State<unknown>): void => {
           progress = one.state === 'pending' ? one.progress : undefined;
-          updateSoon();
+          if (late.isLate()) updateSoon();
         };
         stops.push(graph.watch(cell, watch));
       }
@@ -233,7 +243,14 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
         updateSoon();
       });
       watcher.observe(body);
-      stops.push(() => watcher.disconnect());
+      const sight = new IntersectionObserver((seen) => (isNear = seen.at(-1)!.isIntersecting), {
+        rootMargin: NEAR,
+      });
+      sight.observe(element);
+      stops.push(
+        () => watcher.disconnect(),
+        () => sight.disconnect(),
+      );
     },
     setPaper(room) {
       paper = room;

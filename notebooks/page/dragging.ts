@@ -67,6 +67,8 @@ export function draggable(element: Element, { may, start, move, end, cancel, tap
       pressed.stopPropagation();
       onCancel();
     };
+    // Nothing is selected on the way.
+    page.addEventListener('selectstart', (event) => event.preventDefault(), { signal });
     page.addEventListener('pointermove', onMove, { signal });
     page.addEventListener('pointerup', onUp, { signal });
     page.addEventListener('pointercancel', onCancel, { signal });

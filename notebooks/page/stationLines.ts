@@ -54,6 +54,7 @@ export function stationLines(
   let focused: string | undefined;
   let joined: ({ readonly at: string } & Ties) | undefined;
   let drawnFlat = '';
+  let drawnUpright = '';
   let isPaper = false;
 
   const hosts = (): CellHost[] => sections().flatMap((section) => section.hosts);
@@ -71,15 +72,18 @@ export function stationLines(
 
   const drawUpright = (): void => {
     const top = -sheet.getBoundingClientRect().top;
-    const piece = stationLine({
+    const input = {
       heightPx: sheet.clientHeight,
       marks: marks(),
       ...(joined && { joined }),
       view: { top: Math.max(0, top), bottom: Math.min(sheet.clientHeight, top + window.innerHeight) },
       lineX: pixels(sheet, '--line'),
       bandPx: pixels(sheet, '--band'),
-    });
-    upright.replaceChildren(toDom(piece, document));
+    };
+    const said = JSON.stringify(input);
+    if (said === drawnUpright) return;
+    drawnUpright = said;
+    upright.replaceChildren(toDom(stationLine(input), document));
   };
 
   const drawFlat = (): void => {

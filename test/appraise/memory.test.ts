@@ -98,6 +98,20 @@ describe('appraiseKept', () => {
     expect(option!.cost.p50).toBeGreaterThan(0.99 * searched.cost.p50);
   });
 
+  it('appraiseKept(option kept by hand) takes its supports and depth from the study', () => {
+    const units = reference.units.map((unit) => ({
+      ...unit,
+      supportsM: unit.supportsM.map((x, i) => (i === 1 ? x + 1 : x)),
+    }));
+    const { number, form, method } = reference;
+    const byHand = { number, form, method, units, depthM: reference.depthM.midspan + 0.1 };
+    const edited = { ...study, options: { ...study.options, kept: [byHand] } };
+    const { option } = appraiseKept(edited, reference, left);
+    expect(option!.units).toEqual(units);
+    expect(option!.depthM.midspan).toBeCloseTo(reference.depthM.midspan + 0.1, 9);
+    expect(option).toEqual(appraise(edited, left).options.find((one) => one.number === number));
+  });
+
   it('appraiseKept(river widened over a pier) says which stretch and still works the option out', () => {
     const { option, faults } = appraiseKept(withRiver(study, fromM - 10, toM), reference, left);
     expect(faults).toEqual(['support in a barred stretch: River Wend']);

@@ -1,0 +1,155 @@
+/**
+ * How the option study answers a hand: opens the built page in Chromium, drags the no-pier width and the steel rate for two
+ * seconds each with real moves of the mouse, and prints what came of it. Run on a machine with nothing else to do:
+ *
+ *   npx tsx test/bench/page.ts
+ *
+ * Aims: first stack within 2 s of opening, 30 updates a second or more while dragging, everything drawn within 200 ms of
+ * the release (150 later).
+ */
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join, resolve } from 'node:path';
+import type { Page } from 'playwright-core';
+import { build } from 'vite';
+import { openSite } from '../browser/site.ts';
+
+/** What one drag came to. */
+interface Drag {
+  readonly updates: number;
+  readonly ms: number;
+  readonly longestFrameMs: number;
+  readonly releaseMs: number;
+}
+
+/** Notes in the page when things are drawn; what it needs of the page is found when it is first called. */
+interface Watch {
+  readonly first: number;
+  start: (station: string) => void;
+  release: () => void;
+  result: () => Promise<Drag>;
+}
+type Watched = Window & { readonly watched: Watch };
+
+/** Runs in the page before anything else. */
+function watchPage(): void {
+  let first = 0;
+  const opening = new MutationObserver(() => {
+    if (first > 0 || !document.querySelector('[data-option]')) return;
+    requestAnimationFrame(() => (first ||= performance.now()));
+  });
+  opening.observe(document, { childList: true, subtree: true });
+  let updates = 0;
+  let began = 0;
+  let ended = 0;
+  let lastDrawn = 0;
+  let longest = 0;
+  let isDragging = false;
+  const watched: Watch = {
+    get first() {
+      return first;
+    },
+    start(station) {
+      const cell = document.getElementById(station)!;
+      updates = longest = 0;
+      isDragging = true;
+      began = performance.now();
+      let before = began;
+      let isNew = false;
+      new MutationObserver(() => (isNew = true)).observe(cell, { childList: true, subtree: true });
+      const frame = (now: number): void => {
+        if (!isDragging) return;
+        longest = Math.max(longest, now - before);
+        before = now;
+        if (isNew) updates += 1;
+        isNew = false;
+        requestAnimationFrame(frame);
+      };
+      requestAnimationFrame(frame);
+    },
+    release() {
+      isDragging = false;
+      ended = lastDrawn = performance.now();
+      const bodies = document.querySelectorAll('.section .body, .section .notes, header .live');
+      const drawing = new MutationObserver(() => {
+        requestAnimationFrame(() => (lastDrawn = performance.now()));
+      });
+      for (const body of bodies) drawing.observe(body, { childList: true, subtree: true });
+    },
+    async result() {
+      while (performance.now() - lastDrawn < 1500) await new Promise((resolve) => setTimeout(resolve, 50));
+      return { updates, ms: ended - began, longestFrameMs: longest, releaseMs: lastDrawn - ended };
+    },
+  };
+  Object.assign(window, { watched });
+}
+
+/** Processor time that the page's own thread has used, ms: fair on a machine that does other things as well. */
+async function busyMeter(page: Page): Promise<() => Promise<number>> {
+  const session = await page.context().newCDPSession(page);
+  await session.send('Performance.enable', { timeDomain: 'threadTicks' });
+  return async () => {
+    const { metrics } = await session.send('Performance.getMetrics');
+    return 1000 * metrics.find(({ name }) => name === 'TaskDuration')!.value;
+  };
+}
+
+/** Drags the figure of a name to and fro for two seconds, and says what its cell and the page did. */
+async function drag(page: Page, name: string, station: string): Promise<Drag & { readonly busyMs: number }> {
+  const busy = await busyMeter(page);
+  const field = page.locator(`[role=spinbutton][aria-label^="${name},"]`).first();
+  await field.scrollIntoViewIfNeeded();
+  const box = (await field.boundingBox())!;
+  const x = box.x + box.width / 2;
+  const y = box.y + box.height / 2;
+  await page.mouse.move(x, y);
+  await page.mouse.down();
+  await page.evaluate((at) => (window as unknown as Watched).watched.start(at), station);
+  const before = await busy();
+  const start = Date.now();
+  for (let step = 1; Date.now() - start < 2000; step += 1) {
+    // Slowly out to 60 px and back: every move is a new value.
+    await page.mouse.move(x + 30 * (1 - Math.cos(step / 15)) + (step % 2), y);
+  }
+  const busyMs = (await busy()) - before;
+  await page.mouse.move(x + 40, y);
+  await page.evaluate(() => (window as unknown as Watched).watched.release());
+  await page.mouse.up();
+  return { ...(await page.evaluate(() => (window as unknown as Watched).watched.result())), busyMs };
+}
+
+const outDir = mkdtempSync(join(tmpdir(), 'spanledger-'));
+const configFile = resolve(import.meta.dirname, '../../vite.config.ts');
+await build({ configFile, logLevel: 'silent', build: { outDir } });
+const site = await openSite(outDir);
+try {
+  for (let round = 1; round <= 3; round += 1) {
+    const { page, heard } = await site.open('about:blank');
+    // The runner of this script names functions by a helper that the page does not have.
+    await page.addInitScript('globalThis.__name = (named) => named');
+    await page.addInitScript(watchPage);
+    await page.goto(new URL('option-study.html', site.address).href);
+    await page.waitForFunction(() => (window as unknown as Watched).watched.first > 0);
+    const first = await page.evaluate(() => (window as unknown as Watched).watched.first);
+    console.log(`round ${round}: first stack ${first.toFixed(0)} ms after opening`);
+    await page.waitForTimeout(2000);
+    for (const [name, station] of [
+      ['no-pier width', '1+020'],
+      ['steel rate', '7+005'],
+    ] as const) {
+      const { updates, ms, longestFrameMs, releaseMs, busyMs } = await drag(page, name, station);
+      const figures = [
+        `${((1000 * updates) / ms).toFixed(0)} updates a second`,
+        `${(busyMs / Math.max(1, updates)).toFixed(0)} ms of the page's thread each`,
+        `longest frame ${longestFrameMs.toFixed(0)} ms`,
+        `all drawn ${releaseMs.toFixed(0)} ms after release`,
+      ];
+      console.log(`  ${name}: ${figures.join(', ')}`);
+    }
+    if (heard.console.length > 0) console.log(`  the page said: ${heard.console.join('; ')}`);
+    await page.context().close();
+  }
+} finally {
+  await site.close();
+  rmSync(outDir, { recursive: true });
+}
