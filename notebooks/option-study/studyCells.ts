@@ -1,6 +1,6 @@
 import { appraiseKept, formFacts, guide, memory, survey } from '../../lib/index.ts';
 import type { Appraisal, AppraisedOption, RegisterEntry, Study } from '../../lib/index.ts';
-import { share, type StudyStore } from '../page/index.ts';
+import { share, untilDragRests, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import type { Appraiser } from '../worker/index.ts';
 
@@ -62,6 +62,7 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     'appraisal',
     { asked },
     async (v, run): Promise<Appraisal> => {
+      await untilDragRests(run.signal);
       const numbered = { ...v.asked, options: { ...v.asked.options, register } };
       const result = await worker.appraise(numbered, run);
       register = result.register;

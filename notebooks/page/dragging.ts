@@ -23,6 +23,22 @@ export interface Drag {
 /** Movement that still counts as a press in place, px. */
 const SLACK_PX = 3;
 
+/** A drag that rests for this long lets slow work go on, ms. */
+const REST_MS = 120;
+
+/**
+ * Resolves at once unless something is dragged, else on its release or once it rests: what takes long waits for that. Never
+ * resolves after `signal` has been aborted, which is what the next step of the drag does.
+ */
+export function untilDragRests(signal: AbortSignal): Promise<void> {
+  if (!document.documentElement.classList.contains('dragging')) return Promise.resolve();
+  return new Promise((resolve) => {
+    const timer = setTimeout(resolve, REST_MS);
+    signal.addEventListener('abort', () => clearTimeout(timer));
+    document.addEventListener('pointerup', () => resolve(), { once: true, signal });
+  });
+}
+
 /**
  * Makes an element draggable with mouse or pen. The drag lives on the document, so that it goes on when a new drawing
  * takes the place of the element under the pointer. Touch is left to the browser, which scrolls with it.
