@@ -1,6 +1,18 @@
 /** The front door: notebooks and tests of the whole import from here. */
 export * from './model/index.ts';
-export { appraise, appraiseSteps, type Step } from './appraise.ts';
+export { appraise, appraiseSteps } from './appraise.ts';
+export { conclude, optionsOf } from './appraise/conclude.ts';
+export {
+  formsAsked,
+  laySteps,
+  proposeSteps,
+  workOutSteps,
+  type FormProposals,
+  type LaidRow,
+  type Share,
+  type Step,
+  type Steps,
+} from './appraise/parts.ts';
 export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
 export type { PricedAppraisal } from './appraise/appraiseOption.ts';
 export { formFacts } from './appraise/facts.ts';

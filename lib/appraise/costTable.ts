@@ -4,7 +4,6 @@ import { expectedLines, placeText, standPierBetween } from '../substructure/inde
 import type { Memory, TrialRow } from './memory.ts';
 import { remembered } from '../kept.ts';
 import { SHARES, trialRows, type FormAndMethod, type RowMakers, type TrialRows } from './trialRows.ts';
-import type { Work } from './work.ts';
 
 /** Place of a value on a rising grid: index of the interval and share within it, held at both ends. */
 function between(grid: readonly number[], value: number): readonly [index: number, share: number] {
@@ -19,8 +18,8 @@ function between(grid: readonly number[], value: number): readonly [index: numbe
 export interface TableShelf {
   /** The table the search of one form uses: the form by its method and its approach form by the usual one. */
   readonly tableFor: (asked: FormAndMethod) => CostTable;
-  /** Sizes all that the table of one form is read off, pausing after each trial. */
-  readonly lay: (asked: FormAndMethod) => Work<void>;
+  /** The rows that the table of one form is read off: its own and those of its approach. */
+  readonly rowsOf: (asked: FormAndMethod) => readonly TrialRows[];
 }
 
 /**
@@ -113,10 +112,11 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
   };
   return {
     tableFor,
-    *lay(asked) {
+    rowsOf(asked) {
       const { pattern } = formModule(asked.form);
-      yield* rowsFor(asked).all();
-      if (pattern.kind !== 'continuous') yield* rowsFor(usual(pattern.approach)).all();
+      return pattern.kind === 'continuous'
+        ? [rowsFor(asked)]
+        : [rowsFor(asked), rowsFor(usual(pattern.approach))];
     },
   };
 }

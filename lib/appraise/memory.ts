@@ -27,7 +27,7 @@ export type AtDepth = Pick<WorkedOption, 'designs' | 'profile' | 'supports' | 'l
 export interface Proposals {
   readonly arrangements: readonly Arrangement[];
   readonly counts: readonly DroppedCount[];
-  /** Smallest relaxations, smallest first, where nothing fits. */
+  /** Where there are none: the rules that put the form out, or the smallest relaxations, smallest first. */
   readonly because: readonly string[];
 }
 
@@ -70,7 +70,7 @@ export interface Memory {
 export function memory(): Memory {
   return {
     designs: kept(4000),
-    rows: kept(400),
+    rows: kept(800),
     piers: kept(2000),
     supports: kept(2000),
     sites: kept(6),

@@ -2,7 +2,7 @@ import { arrange } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
 import type { Arrangement, FormId, MethodId } from '../model/index.ts';
 import { rule, rulingsFor } from '../rules/index.ts';
-import { arrangementFacts } from './facts.ts';
+import { arrangementFacts, formFacts } from './facts.ts';
 import type { Proposals } from './memory.ts';
 import { relaxationWords } from './relaxationWords.ts';
 import { requestFor } from './requestFor.ts';
@@ -20,12 +20,21 @@ function meetsTrouble(bench: Workbench, arrangement: Arrangement): boolean {
   );
 }
 
+/** Why the rules put a form out of this study; empty where they do not, or where it is to be worked out all the same. */
+export function outBecause({ study, site }: Workbench, form: FormId): readonly string[] {
+  if (study.options.workOutAnyway.includes(form)) return [];
+  const rulings = rulingsFor('form', form, formFacts(site));
+  return rulings.filter(({ effect }) => effect === 'out').flatMap(({ because }) => because);
+}
+
 /**
- * Searches a form by its usual method, and by the next one where the rules warn of the first. The cheapest of each
+ * Searches a form, unless the rules put it out, by its usual method, and by the next one where the rules warn of the first. The cheapest of each
  * method is proposed first, then the next best of all, three at most; the rest is counted by reason. Pauses while the
  * table is laid, and between the searches.
  */
 export function* proposalsFor(bench: Workbench, form: FormId): Work<Proposals> {
+  const out = outBecause(bench, form);
+  if (out.length > 0) return { arrangements: [], counts: [], because: out };
   const store = bench.keptHere.proposals;
   const key = `${form} ${bench.booksKey}`;
   return store.get(key) ?? store.put(key, yield* search(bench, form));
@@ -40,7 +49,9 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
   const because: string[] = [];
   const byOne = function* (method: MethodId): Work<readonly Arrangement[]> {
     const asked = { form, method };
-    yield* bench.tables.lay(asked);
+    for (const rows of bench.tables.rowsOf(asked)) {
+      for (const index of rows.spansM.keys()) yield* rows.make(index);
+    }
     const result = arrange(requestFor(asked, site), site, bench.tables.tableFor(asked));
     for (const dropped of result.dropped) count(dropped.reason, dropped.count);
     because.push(...result.relaxations.map(relaxationWords));

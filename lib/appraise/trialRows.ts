@@ -51,8 +51,10 @@ function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number
 export interface TrialRows {
   readonly spansM: readonly number[];
   readonly row: (index: number) => TrialRow;
-  /** Sizes all rows, pausing after each trial. */
-  readonly all: () => Work<void>;
+  /** The same, pausing after each trial. */
+  readonly make: (index: number) => Work<TrialRow>;
+  /** What a row is kept under. */
+  readonly key: (index: number) => string;
 }
 
 /** What rows are made from besides their form and method. */
@@ -128,16 +130,10 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     return { depthM, perM, fixed, loadKNm: permanentKNm + trafficKNm };
   };
 
-  const keyOf = (index: number): string => JSON.stringify([base, spansM[index], booksKey]);
-  const known: (TrialRow | undefined)[] = spansM.map((_, index) => rows.get(keyOf(index)));
-  const rowSteps = function* (index: number): Work<TrialRow> {
-    return (known[index] ??= rows.put(keyOf(index), yield* made(spansM[index]!)));
+  const key = (index: number): string => JSON.stringify([base, spansM[index], booksKey]);
+  const known: (TrialRow | undefined)[] = spansM.map((_, index) => rows.get(key(index)));
+  const make = function* (index: number): Work<TrialRow> {
+    return (known[index] ??= rows.put(key(index), yield* made(spansM[index]!)));
   };
-  return {
-    spansM,
-    row: (index) => known[index] ?? finish(rowSteps(index)),
-    *all() {
-      for (const index of spansM.keys()) yield* rowSteps(index);
-    },
-  };
+  return { spansM, row: (index) => known[index] ?? finish(make(index)), make, key };
 }

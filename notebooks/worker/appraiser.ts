@@ -1,31 +1,100 @@
-import type { SlowRun } from '../reactive/index.ts';
-import { client } from './client.ts';
+import { conclude, formsAsked, optionsOf } from '../../lib/index.ts';
+import type { Appraisal, FormId, Study } from '../../lib/index.ts';
+import type { Progress, SlowRun } from '../reactive/index.ts';
+import { client, type Client } from './client.ts';
 import type { jobs } from './jobs.ts';
-import type { ArgOf, ResultOf } from './messages.ts';
-
-type Jobs = typeof jobs;
 
 /** Appraises studies off the page's thread. */
 export interface Appraiser {
   /** The appraisal of a study; can be aborted, tells how far it has come. Fits the run of a slow cell. */
-  readonly appraise: (
-    study: ArgOf<Jobs['appraise']>,
-    run?: Partial<SlowRun>,
-  ) => Promise<ResultOf<Jobs['appraise']>>;
-  /** Ends the worker; what it was working on rejects. */
+  readonly appraise: (study: Study, run?: Partial<SlowRun>) => Promise<Appraisal>;
+  /** Ends the workers; what they were working on rejects. */
   readonly end: () => void;
 }
 
-/** Starts the worker. Everything asked of it rejects once it has failed to load or has been ended. */
+/** More workers than this have too little to do each. */
+const MOST = 4;
+
+/** How far one of the rounds of an appraisal has come, of several workers together. */
+function progressOf(round: number, rounds: number, parts: readonly (Progress | undefined)[]): Progress {
+  const share = parts.reduce((sum, part) => sum + (part && part.of > 0 ? part.done / part.of : 0), 0);
+  const what = parts.findLast((part) => part !== undefined)?.what ?? '';
+  return { done: Math.round((100 * (round + share / parts.length)) / rounds), of: 100, what };
+}
+
+/**
+ * Appraises with several workers: together they size the rows of the cost tables, then each searches its share of the
+ * forms and works out its share of the options. A form goes to the same worker each time, which remembers its designs.
+ * The result is that of `appraise`, whoever did what.
+ */
+export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser['appraise'] {
+  const of = workers.length;
+
+  return async (study, { signal, report } = {}) => {
+    const forms = formsAsked(study);
+    /** The worker of a form; the first has those of options kept by hand that nobody asked for. */
+    const workerOf = (form: FormId): number => Math.max(0, forms.indexOf(form)) % of;
+    /** One round: every worker does its part; the first failure gives up the others. */
+    const round = async <T>(
+      number: number,
+      part: (worker: Client<typeof jobs>, share: number, run: Partial<SlowRun>) => Promise<T[]>,
+    ): Promise<T[]> => {
+      const failed = new AbortController();
+      const told: (Progress | undefined)[] = workers.map(() => undefined);
+      const done = workers.map((worker, share) =>
+        part(worker, share, {
+          signal: signal ? AbortSignal.any([signal, failed.signal]) : failed.signal,
+          report(progress) {
+            told[share] = progress;
+            report?.(progressOf(number, 3, told));
+          },
+        }),
+      );
+      try {
+        return (await Promise.all(done)).flat();
+      } catch (error) {
+        failed.abort(error);
+        throw error;
+      }
+    };
+
+    const rows = await round(0, (worker, share, run) =>
+      worker.call('lay', { study, share: { share, of } }, run),
+    );
+    const found = await round(1, (worker, share, run) =>
+      worker.call('propose', { study, forms: forms.filter((form) => workerOf(form) === share), rows }, run),
+    );
+    found.sort((a, b) => forms.indexOf(a.form) - forms.indexOf(b.form));
+    const registered = optionsOf(study, found);
+    const priced = await round(2, (worker, share, run) =>
+      worker.call(
+        'workOut',
+        { study, options: registered.options.filter(({ form }) => workerOf(form) === share) },
+        run,
+      ),
+    );
+    return conclude(study, found, registered, priced);
+  };
+}
+
+/** Starts the workers. Everything asked of them rejects once one has failed to load or they have been ended. */
 export function appraiser(): Appraiser {
-  const worker = new Worker(new URL('./appraise.worker.ts', import.meta.url), { type: 'module' });
-  const { call, close } = client<Jobs>(worker);
-  worker.addEventListener('error', (event) => close(new Error(`the worker stopped: ${event.message}`)));
+  const count = Math.min(MOST, Math.max(1, navigator.hardwareConcurrency));
+  const started = Array.from({ length: count }, () => {
+    const worker = new Worker(new URL('./appraise.worker.ts', import.meta.url), { type: 'module' });
+    const line = client<typeof jobs>(worker);
+    worker.addEventListener('error', (event) =>
+      line.close(new Error(`the worker stopped: ${event.message}`)),
+    );
+    return { worker, line };
+  });
   return {
-    appraise: (study, run) => call('appraise', study, run),
-    end: () => {
-      worker.terminate();
-      close(new Error('the worker was ended'));
+    appraise: appraiseWith(started.map(({ line }) => line)),
+    end() {
+      for (const { worker, line } of started) {
+        worker.terminate();
+        line.close(new Error('the worker was ended'));
+      }
     },
   };
 }

@@ -1,8 +1,33 @@
-import { appraiseSteps, memory } from '../../lib/index.ts';
-import type { Study } from '../../lib/index.ts';
+import { laySteps, memory, proposeSteps, workOutSteps } from '../../lib/index.ts';
+import type { FormId, LaidRow, Option, PricedAppraisal, Share, Study, Steps } from '../../lib/index.ts';
 
 /** Kept as long as the worker lives: the next study is nearly always the last one with one thing changed. */
 const kept = memory();
 
-/** What the worker of the notebook does. */
-export const jobs = { appraise: (study: Study) => appraiseSteps(study, kept) };
+/** The part of a study that is asked of one worker. */
+interface Part {
+  readonly study: Study;
+}
+
+/** What the workers of the notebook do; each takes a part of the same study. */
+export const jobs = {
+  /** Sizes a share of the rows of the cost tables. */
+  lay: ({ study, share }: Part & { readonly share: Share }): Steps<LaidRow[]> => laySteps(study, share, kept),
+
+  /** Searches some forms, with the rows that all have sized together. */
+  propose({
+    study,
+    forms,
+    rows,
+  }: Part & { readonly forms: readonly FormId[]; readonly rows: readonly LaidRow[] }) {
+    for (const [key, row] of rows) kept.rows.put(key, row);
+    return proposeSteps(study, forms, kept);
+  },
+
+  /** Works out some options. */
+  *workOut({ study, options }: Part & { readonly options: readonly Option[] }): Steps<PricedAppraisal[]> {
+    const priced = yield* workOutSteps(study, options, kept);
+    // Totals move to the page; those in memory stay.
+    return priced.map(({ option, totals }) => ({ option, totals: totals.slice() }));
+  },
+};

@@ -43,7 +43,6 @@ describe('memory', () => {
     ['dearer steel', withSteel(study, 5)],
     ['another level of the road', other],
     ['ground that is known', withGround(study)],
-    ['the first study again', study],
   ];
   let shared: Appraisal[];
   beforeAll(() => {

@@ -1,0 +1,47 @@
+import { stand } from '../decide/index.ts';
+import type { Appraisal, Study } from '../model/index.ts';
+import { survey } from '../site/index.ts';
+import { fingerprint } from '../study/index.ts';
+import type { PricedAppraisal } from './appraiseOption.ts';
+import type { FormProposals } from './parts.ts';
+import { numberOptions, type Registered } from './register.ts';
+
+/** The options of a study with their numbers: those kept by hand, and what was proposed for each form in order. */
+export const optionsOf = (study: Study, found: readonly FormProposals[]): Registered =>
+  numberOptions(
+    found.flatMap(({ arrangements }) => arrangements),
+    study.options,
+  );
+
+/**
+ * Puts the parts of an appraisal together: every option by cost, everything dropped with its reasons, and where the
+ * options stand.
+ */
+export function conclude(
+  study: Study,
+  found: readonly FormProposals[],
+  { register, retired }: Registered,
+  priced: readonly PricedAppraisal[],
+): Appraisal {
+  const contenders = priced.map(({ option: { number, status, cost }, totals }) => ({
+    number,
+    status,
+    p50: cost.p50,
+    totals,
+  }));
+  return {
+    study: { title: study.title, version: study.version, fingerprint: fingerprint(study) },
+    site: survey(study.brief),
+    options: priced
+      .map(({ option }) => option)
+      .sort((a, b) => a.cost.p50 - b.cost.p50 || a.number - b.number),
+    currency: study.books.currency,
+    dropped: found.flatMap(({ form, arrangements, because }) =>
+      arrangements.length === 0 ? [{ form, because }] : [],
+    ),
+    droppedCounts: found.flatMap(({ counts }) => counts),
+    register,
+    retired,
+    standing: stand(contenders, study.books, study.brief.budget),
+  };
+}

@@ -1,0 +1,86 @@
+import { formModule, sizeableForms } from '../forms/index.ts';
+import type { FormId, Option, Study } from '../model/index.ts';
+import { appraiseOption, type PricedAppraisal } from './appraiseOption.ts';
+import { drawn } from './drawn.ts';
+import type { Memory, Proposals, TrialRow } from './memory.ts';
+import { outBecause, proposalsFor } from './proposals.ts';
+import type { TrialRows } from './trialRows.ts';
+import { saying } from './work.ts';
+import { workbench } from './workbench.ts';
+
+/** How far work has come: `done` of `of` steps, and what is being worked out. */
+export interface Step {
+  readonly done: number;
+  readonly of: number;
+  readonly what: string;
+}
+
+/** Work in steps between which a worker may pause or drop it. */
+export type Steps<T> = Generator<Step, T, unknown>;
+
+/** The forms that a study asks for. */
+export const formsAsked = ({ options }: Study): readonly FormId[] =>
+  options.forms.length > 0 ? options.forms : sizeableForms;
+
+/** One of several who work on the same study: takes every `of`-th piece, from the `share`-th (0-based). */
+export interface Share {
+  readonly share: number;
+  readonly of: number;
+}
+
+/** A row of a cost table and what it is kept under: what those who work on one study hand each other. */
+export type LaidRow = readonly [key: string, row: TrialRow];
+
+/** Sizes a share of the rows that the cost tables of a study are read off. */
+export function* laySteps(study: Study, { share, of }: Share, kept: Memory): Steps<LaidRow[]> {
+  const bench = workbench(study, kept);
+  const forms = formsAsked(study).filter((form) => outBecause(bench, form).length === 0);
+  const rows = new Set<TrialRows>(
+    forms.flatMap((form) => bench.tables.rowsOf({ form, method: formModule(form).methods[0] })),
+  );
+  const mine = [...rows]
+    .flatMap((table) => [...table.spansM.keys()].map((index) => ({ table, index })))
+    .filter((_, i) => i % of === share);
+  const laid: LaidRow[] = [];
+  for (const { table, index } of mine) {
+    const step = { done: laid.length, of: mine.length, what: 'sizing trial spans' };
+    yield step;
+    laid.push([table.key(index), yield* saying(step, table.make(index))]);
+  }
+  return laid;
+}
+
+/** What was found for one form. */
+export interface FormProposals extends Proposals {
+  readonly form: FormId;
+}
+
+/** Searches the arrangements of some forms of a study. */
+export function* proposeSteps(study: Study, forms: readonly FormId[], kept: Memory): Steps<FormProposals[]> {
+  const bench = workbench(study, kept);
+  const found: FormProposals[] = [];
+  for (const form of forms) {
+    const step = { done: found.length, of: forms.length, what: `arranging ${formModule(form).name}` };
+    yield step;
+    found.push({ form, ...(yield* saying(step, proposalsFor(bench, form))) });
+  }
+  return found;
+}
+
+/** Works out, prices and rules on some options of a study. */
+export function* workOutSteps(
+  study: Study,
+  options: readonly Option[],
+  kept: Memory,
+): Steps<PricedAppraisal[]> {
+  const bench = workbench(study, kept);
+  const forms = new Set(options.flatMap((option) => option.units.map((unit) => unit.form)));
+  const onDraws = drawn(bench, [...forms].sort());
+  const priced: PricedAppraisal[] = [];
+  for (const option of options) {
+    const step = { done: priced.length, of: options.length, what: `working out option ${option.number}` };
+    yield step;
+    priced.push(yield* saying(step, appraiseOption(bench, onDraws, option)));
+  }
+  return priced;
+}
