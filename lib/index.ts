@@ -6,6 +6,7 @@ export {
   formsAsked,
   laySteps,
   proposeSteps,
+  shareOf,
   workOutSteps,
   type FormProposals,
   type LaidRow,

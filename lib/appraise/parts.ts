@@ -22,11 +22,14 @@ export type Steps<T> = Generator<Step, T, unknown>;
 export const formsAsked = ({ options }: Study): readonly FormId[] =>
   options.forms.length > 0 ? options.forms : sizeableForms;
 
-/** One of several who work on the same study: takes every `of`-th piece, from the `share`-th (0-based). */
+/** One of several who work on the same study: the `share`-th (0-based) of `of`. */
 export interface Share {
   readonly share: number;
   readonly of: number;
 }
+
+/** Whose share the piece `index` of `count` is: pieces that lie together go together, because they are alike. */
+export const shareOf = (index: number, count: number, of: number): number => Math.floor((index * of) / count);
 
 /** A row of a cost table and what it is kept under: what those who work on one study hand each other. */
 export type LaidRow = readonly [key: string, row: TrialRow];
@@ -40,7 +43,7 @@ export function* laySteps(study: Study, { share, of }: Share, kept: Memory): Ste
   );
   const mine = [...rows]
     .flatMap((table) => [...table.spansM.keys()].map((index) => ({ table, index })))
-    .filter((_, i) => i % of === share);
+    .filter((_, i, all) => shareOf(i, all.length, of) === share);
   const laid: LaidRow[] = [];
   for (const { table, index } of mine) {
     const step = { done: laid.length, of: mine.length, what: 'sizing trial spans' };

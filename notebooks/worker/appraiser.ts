@@ -1,4 +1,4 @@
-import { conclude, formsAsked, optionsOf } from '../../lib/index.ts';
+import { conclude, formsAsked, optionsOf, shareOf } from '../../lib/index.ts';
 import type { Appraisal, FormId, Study } from '../../lib/index.ts';
 import type { Progress, SlowRun } from '../reactive/index.ts';
 import { client, type Client } from './client.ts';
@@ -33,7 +33,7 @@ export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser
   return async (study, { signal, report } = {}) => {
     const forms = formsAsked(study);
     /** The worker of a form; the first has those of options kept by hand that nobody asked for. */
-    const workerOf = (form: FormId): number => Math.max(0, forms.indexOf(form)) % of;
+    const workerOf = (form: FormId): number => shareOf(Math.max(0, forms.indexOf(form)), forms.length, of);
     /** One round: every worker does its part; the first failure gives up the others. */
     const round = async <T>(
       number: number,
