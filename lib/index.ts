@@ -6,7 +6,6 @@ export {
   formsAsked,
   laySteps,
   proposeSteps,
-  shareOf,
   workOutSteps,
   type FormProposals,
   type LaidRow,

@@ -10,6 +10,8 @@ export interface DepthTrial {
 
 /** Cost within this share of the least counts as the least: the curve is flat and the choice must not jitter. */
 const FLAT = 0.01;
+/** Depths closer than this share of themselves cost so nearly the same that nothing is tried between them. */
+const FINE = 0.08;
 /** Depths are drawn to 50 mm: 20 steps to the metre. */
 const STEPS = 20;
 
@@ -50,8 +52,9 @@ export function* leastCostDepth(
   }
   const rows = sorted();
   const at = rows.findIndex(([on]) => on === cheapest(holding())[0]);
+  const best = rows[at]![0];
   for (const beside of [rows[at - 1], rows[at + 1]]) {
-    if (beside) yield* visit((rows[at]![0] + beside[0]) / 2);
+    if (beside && Math.abs(beside[0] - best) > FINE * best) yield* visit((best + beside[0]) / 2);
   }
 
   const final = holding();

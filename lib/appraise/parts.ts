@@ -28,22 +28,19 @@ export interface Share {
   readonly of: number;
 }
 
-/** Whose share the piece `index` of `count` is: pieces that lie together go together, because they are alike. */
-export const shareOf = (index: number, count: number, of: number): number => Math.floor((index * of) / count);
-
 /** A row of a cost table and what it is kept under: what those who work on one study hand each other. */
 export type LaidRow = readonly [key: string, row: TrialRow];
 
-/** Sizes a share of the rows that the cost tables of a study are read off. */
+/** Sizes the rows that a share of the cost tables of a study is read off; a form and an approach have one each. */
 export function* laySteps(study: Study, { share, of }: Share, kept: Memory): Steps<LaidRow[]> {
   const bench = workbench(study, kept);
   const forms = formsAsked(study).filter((form) => outBecause(bench, form).length === 0);
-  const rows = new Set<TrialRows>(
+  const tables = new Set<TrialRows>(
     forms.flatMap((form) => bench.tables.rowsOf({ form, method: formModule(form).methods[0] })),
   );
-  const mine = [...rows]
-    .flatMap((table) => [...table.spansM.keys()].map((index) => ({ table, index })))
-    .filter((_, i, all) => shareOf(i, all.length, of) === share);
+  const mine = [...tables]
+    .filter((_, i) => i % of === share)
+    .flatMap((table) => [...table.spansM.keys()].map((index) => ({ table, index })));
   const laid: LaidRow[] = [];
   for (const { table, index } of mine) {
     const step = { done: laid.length, of: mine.length, what: 'sizing trial spans' };

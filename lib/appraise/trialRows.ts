@@ -84,7 +84,8 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     { length: TABLE_SPANS },
     (_, i) => least * Math.pow(most / least, i / (TABLE_SPANS - 1)),
   );
-  const hung = formModule(form).pattern.kind === 'pylon';
+  const { kind } = formModule(form).pattern;
+  const hung = kind === 'pylon';
   const base = {
     form,
     method,
@@ -121,8 +122,9 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     );
     const whole = sized(spanM, depthM, 1);
     yield;
+    // Only a continuous unit has shorter spans of the same depth.
     const perM = SHARES.map((share) =>
-      share === 1 || hung ? whole.perM : sized(share * spanM, depthM, 1).perM,
+      share === 1 || kind !== 'continuous' ? whole.perM : sized(share * spanM, depthM, 1).perM,
     );
     yield;
     const fixed = hung ? [whole.fixed, whole.fixed, sized(spanM, depthM, 2).fixed] : [whole.fixed];

@@ -69,18 +69,21 @@ function taskOf(
   profile: RoadProfile,
 ): UnitTask {
   const { site } = bench;
+  const module = formModule(unit.form);
   const clear = (x: number): number =>
     Math.max(0, roadLevelAt(site, profile, x) - constructionDepth(site.deck, depthM) - groundAt(site, x));
   return {
     form: unit.form,
-    method: unit.role === 'main' ? option.method : formModule(unit.form).methods[0],
+    method: unit.role === 'main' ? option.method : module.methods[0],
     spansM: spansOf(unit),
     deck: site.deck,
     standard: site.standard,
     planRadiusM: site.planRadiusM ?? Infinity,
     depthM,
     ...(unit.pylons ? { pylons: unit.pylons } : {}),
-    clearUnderM: unit.supportsM.map((x) => Math.round(clear(x) / CLEAR_CLASS_M) * CLEAR_CLASS_M),
+    ...(module.ignoresHeight
+      ? {}
+      : { clearUnderM: unit.supportsM.map((x) => Math.round(clear(x) / CLEAR_CLASS_M) * CLEAR_CLASS_M) }),
   };
 }
 

@@ -11,6 +11,8 @@ export interface FormModule {
   readonly pattern: Pattern;
   /** Methods of construction, the usual one first. */
   readonly methods: readonly [MethodId, ...MethodId[]];
+  /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
+  readonly ignoresHeight?: true;
   /**
    * Sizes one unit. Always returns a design; where a limit cannot be met within practical plates, strands or bars the
    * offending check has a utilisation above 1 and a warning says so (the option-stage rule then puts the option out).

@@ -62,6 +62,8 @@ async function opened(
 const SAVE_AFTER_MS = 600;
 
 async function start(): Promise<void> {
+  // They load while the page looks for its study.
+  const workers = appraiser();
   const cupboard = await deviceCupboard().catch(() => null);
   const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
   const { study, problem, ...place } = await opened(shelf);
@@ -69,7 +71,7 @@ async function start(): Promise<void> {
 
   const graph = newGraph();
   const store = studyStore(graph, study, check);
-  const cells = studyCells(graph, store, appraiser());
+  const cells = studyCells(graph, store, workers);
   const page = sheet(graph);
 
   const saved = h('span', { class: 'state', role: 'status' }, problem);

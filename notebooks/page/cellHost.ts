@@ -49,6 +49,8 @@ export interface HostPage {
   readonly explain: (error: unknown, station: string) => Explained;
   /** The station where a cell of the graph is to be looked for. */
   readonly homeOf: (cellName: string) => string | undefined;
+  /** Whether something is being worked out elsewhere. */
+  readonly isBusy: () => boolean;
   /** The station this one waits for, if any. */
   readonly waitsFor: (station: string) => string | undefined;
   /** The state of a station, or the place of something, has changed. */
@@ -187,14 +189,16 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     if (status.textContent !== words) status.textContent = words;
   };
 
-  /** While something is dragged the screen belongs to what is seen on it; the rest is drawn on release. */
+  /** While something is dragged or worked out the time belongs to what is seen; the rest is drawn once, at the end. */
   const canWait = (): boolean =>
-    !isNear && paper === null && document.documentElement.classList.contains('dragging');
+    !isNear && paper === null && (document.documentElement.classList.contains('dragging') || page.isBusy());
 
   const update = (): void => {
-    if (canWait()) return updateSoon();
-    draw();
+    const waits = canWait();
+    if (waits) updateSoon();
+    else draw();
     const now = stationState();
+    if (waits && element.dataset['state'] === now) return;
     element.dataset['state'] = now;
     element.classList.toggle('pending', now === 'pending');
     element.classList.toggle('held', now === 'held');

@@ -77,7 +77,8 @@ export function exchange(root: Element, next: Element): boolean {
 }
 
 function replace(root: Element, next: Element): void {
-  const pushed = Array.from(root.querySelectorAll('.pushed'), ({ scrollLeft }) => scrollLeft);
+  const lists = root.querySelectorAll<HTMLElement>('.pushed');
+  const pushed = Array.from(lists, ({ dataset }) => Number(dataset['left'] ?? 0));
   root.replaceChildren(...Array.from(next.childNodes));
   if (!pushed.some((left) => left > 0)) return;
   root.querySelectorAll('.pushed').forEach((list, i) => {

@@ -124,6 +124,7 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
     graph,
     frames: queue,
     explain,
+    isBusy: () => graph.cells().some((cell) => cell.kind === 'slow' && graph.state(cell).state === 'pending'),
     homeOf: (cellName: string) => homeOf(cellName, known, (cell) => graph.uses(cell)),
     waitsFor(station: string) {
       const above = new Set(ties().get(station)?.uses);

@@ -1,4 +1,4 @@
-import { conclude, formsAsked, optionsOf, shareOf } from '../../lib/index.ts';
+import { conclude, formsAsked, optionsOf } from '../../lib/index.ts';
 import type { Appraisal, FormId, Study } from '../../lib/index.ts';
 import type { Progress, SlowRun } from '../reactive/index.ts';
 import { client, type Client } from './client.ts';
@@ -24,7 +24,7 @@ function progressOf(round: number, rounds: number, parts: readonly (Progress | u
 
 /**
  * Appraises with several workers: together they size the rows of the cost tables, then each searches its share of the
- * forms and works out its share of the options. A form goes to the same worker each time, which remembers its designs.
+ * forms and works out its share of the options. A form keeps its worker, which remembers its designs.
  * The result is that of `appraise`, whoever did what.
  */
 export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser['appraise'] {
@@ -32,8 +32,8 @@ export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser
 
   return async (study, { signal, report } = {}) => {
     const forms = formsAsked(study);
-    /** The worker of a form; the first has those of options kept by hand that nobody asked for. */
-    const workerOf = (form: FormId): number => shareOf(Math.max(0, forms.indexOf(form)), forms.length, of);
+    /** A form stays with its worker, whose code for it has run and is fast. Forms that nobody asked for go to the first. */
+    const workerOf = (form: FormId): number => Math.max(0, forms.indexOf(form)) % of;
     /** One round: every worker does its part; the first failure gives up the others. */
     const round = async <T>(
       number: number,
@@ -77,9 +77,12 @@ export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser
   };
 }
 
-/** Starts the workers. Everything asked of them rejects once one has failed to load or they have been ended. */
+/**
+ * Starts the workers: one processor is left to the page and to the compiler, without which two workers are slower than one.
+ * Everything asked of them rejects once one has failed to load or they have been ended.
+ */
 export function appraiser(): Appraiser {
-  const count = Math.min(MOST, Math.max(1, navigator.hardwareConcurrency));
+  const count = Math.min(MOST, Math.max(1, navigator.hardwareConcurrency - 1));
   const started = Array.from({ length: count }, () => {
     const worker = new Worker(new URL('./appraise.worker.ts', import.meta.url), { type: 'module' });
     const line = client<typeof jobs>(worker);

@@ -23,6 +23,7 @@ export const compositeI: FormModule = {
   name: 'Composite I-girders',
   pattern: { kind: 'continuous' },
   methods: ['crane', 'launch'],
+  ignoresHeight: true,
   size,
 };
 
