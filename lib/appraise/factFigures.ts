@@ -1,37 +1,9 @@
-import {
-  described,
-  type AppraisedOption,
-  type At,
-  type Described,
-  type Descriptor,
-  type Facts,
-  type Inputs,
-} from '../model/index.ts';
-import { factDictionary, withRatios, type Fact } from '../rules/index.ts';
-import { optionFacts } from './facts.ts';
+import { described, type At, type Descriptor } from '../model/index.ts';
+import { factDictionary } from '../rules/index.ts';
+import { asIs, fact, factOf, factsOf } from './factFigure.ts';
+import { supportFactFigures } from './supportFactFigures.ts';
 import { mainUnit, spansOf } from './workOption.ts';
 
-const known = new WeakMap<AppraisedOption, Facts>();
-
-/** Facts of an option as the rules were asked with them, ratios included. */
-function factsOf(at: At): Facts {
-  const { study, appraisal, option } = at;
-  const found =
-    known.get(option) ??
-    withRatios(
-      optionFacts(
-        study,
-        appraisal.site,
-        option,
-        option.headroom,
-        appraisal.standing.within[option.number] ?? 'unknown',
-      ),
-    );
-  known.set(option, found);
-  return found;
-}
-
-const factOf = (id: string): Fact => factDictionary.find((entry) => entry.id === id)!;
 const main = (at: At): number => at.option.units.indexOf(mainUnit(at.option.units));
 const design = (at: At): string => `${at.root}/designs/${main(at)}`;
 const mainSpans = (at: At): string[] =>
@@ -52,30 +24,6 @@ const pieces = (at: At, field: string): string[] =>
 const innerSupports = (at: At, steps: string): string[] =>
   at.option.supports.slice(1, -1).map((_, s) => `${at.root}/supports/${s + 1}/${steps}`);
 const supports = (at: At): string[] => at.option.supports.map((_, s) => `${at.root}/supports/${s}/chainageM`);
-
-/** Where a fact comes from; facts without an entry here are read as they stand. */
-const fact = <const I extends Inputs>(
-  id: string,
-  formula: string,
-  inputs: (at: At) => I,
-  compute?: Described<I>['compute'],
-): Descriptor =>
-  described({
-    path: `options/:option/facts/${id}`,
-    label: factOf(id).label,
-    unit: factOf(id).unit,
-    method: 'fact for the rules',
-    formula,
-    value: (at) => factsOf(at)[id] ?? 'unknown',
-    inputs,
-    ...(compute === undefined ? {} : { compute }),
-  });
-
-const asIs = (
-  id: string,
-  inputs: (at: At) => Readonly<Record<string, string>>,
-  formula = factOf(id).meaning,
-): Descriptor => fact(id, formula, inputs, (v) => Object.values(v)[0] as number);
 
 const ratios = factDictionary.flatMap(({ id, ratioOf, addedToSecond = 0 }) =>
   ratioOf === undefined
@@ -211,6 +159,7 @@ export const factFigures: readonly Descriptor[] = [
     (at) => ({ pieces: pieces(at, 'massT') }),
     ({ pieces: all }) => Math.max(0, ...all),
   ),
+  ...supportFactFigures,
   asIs('haulLengthM', () => ({ given: 'brief/access/haulLengthM' })),
   asIs('haulMassT', () => ({ given: 'brief/access/haulMassT' })),
   {

@@ -76,6 +76,11 @@ export interface Foundation {
     readonly lengthM: number;
     readonly toeLevelM: number;
   } | null;
+  /**
+   * Where nothing in the tool's range carries the loads on this ground: how many times the allowable load and reach of a
+   * pile the group that is measured would need. Absent where the foundation stands.
+   */
+  readonly overload?: number;
   readonly lines: readonly MeasuredLine[];
 }
 

@@ -1,8 +1,10 @@
 import { z } from 'zod';
 import type { AskedOf, FormId } from '../model/index.ts';
 import { familyOf, formIds } from '../model/index.ts';
+import supportFactsJson from '../../data/rules/facts-supports.json';
 import factsJson from '../../data/rules/facts.json';
 import generalJson from '../../data/rules/general.json';
+import supportsJson from '../../data/rules/supports.json';
 import sourcesJson from '../../data/sources.json';
 import { checkBook } from './checkBook.ts';
 import { formRuleFiles } from './formRuleFiles.ts';
@@ -10,11 +12,12 @@ import { factSchema, ruleSchema, sourceSchema, type Fact, type Rule, type Source
 
 const ruleFile = z.strictObject({ rules: z.array(ruleSchema) });
 
+const factFile = z.strictObject({ facts: z.array(factSchema) });
+
 const facts: ReadonlyMap<string, Fact> = new Map(
-  z
-    .strictObject({ facts: z.array(factSchema) })
-    .parse(factsJson)
-    .facts.map((entry) => [entry.id, entry]),
+  [factsJson, supportFactsJson].flatMap((file) =>
+    factFile.parse(file).facts.map((entry) => [entry.id, entry] as const),
+  ),
 );
 
 const sources: ReadonlyMap<string, Source> = new Map(
@@ -25,7 +28,7 @@ const sources: ReadonlyMap<string, Source> = new Map(
 );
 
 /** Every rule of the project, form by form and then the general ones. */
-export const rules: readonly Rule[] = [...formRuleFiles, generalJson].flatMap(
+export const rules: readonly Rule[] = [...formRuleFiles, generalJson, supportsJson].flatMap(
   (file) => ruleFile.parse(file).rules,
 );
 

@@ -38,17 +38,67 @@ export function pileCapacity(ground: GroundFigures, diameterM: number, inStratum
   return Math.min(soil, concreteMPa * 1000 * area);
 }
 
+/** A group of bored piles and how far its piles are beyond the tool's range: 1 where they are within it. */
+export interface PilesFound {
+  readonly group: PileGroup;
+  readonly overload: number;
+}
+
+/** Overloads are told apart to this. */
+const overloadStep = 0.01;
+
+/**
+ * The group that carries the loads, or where none does the one that would if every pile could carry and reach so many times
+ * more: the least multiple, found by halving. Loads are finite, so there always is one.
+ */
+export function pilesOrNearest(task: FootTask, ground: GroundFigures, levels: PileLevels): PilesFound {
+  const within = boredPiles(task, ground, levels);
+  if (within !== null) return { group: within, overload: 1 };
+  const eased = (overload: number): PileGroup | null =>
+    boredPiles(
+      {
+        ...task,
+        combos: task.combos.map((combo) => ({ ...combo, capacity: combo.capacity * overload })),
+      },
+      ground,
+      levels,
+      overload,
+    );
+  let low = 1;
+  let high = 2;
+  let group = eased(high);
+  while (group === null && high < Number.MAX_SAFE_INTEGER) {
+    low = high;
+    high *= 2;
+    group = eased(high);
+  }
+  if (group === null) throw new RangeError('pile group: expected finite loads and levels');
+  while (high - low > overloadStep) {
+    const middle = (low + high) / 2;
+    const found = eased(middle);
+    if (found === null) low = middle;
+    else [high, group] = [middle, found];
+  }
+  return { group, overload: high };
+}
+
 /**
  * The group with the least effort in piles and cap: diameters and rows are tried in turn, under a wall also how far the cap
  * lies to the front; loads on the corner piles come
  * from V / n with the moments on the pile grid; the length in the bearing stratum is what the corner pile needs.
- * Null when no group carries the loads (the ground or the loads are outside the tool's range).
+ * Null when no group carries the loads (the ground or the loads are outside the tool's range). `reach` multiplies the
+ * longest piles.
  */
-export function boredPiles(task: FootTask, ground: GroundFigures, levels: PileLevels): PileGroup | null {
+export function boredPiles(
+  task: FootTask,
+  ground: GroundFigures,
+  levels: PileLevels,
+  reach = 1,
+): PileGroup | null {
   const { backfill } = task;
-  if (backfill === null) return leastGroup(task, ground, levels)?.group ?? null;
+  if (backfill === null) return leastGroup(task, ground, levels, reach)?.group ?? null;
   const tried = substructureData.abutment.pileHeelShares.map((heelShare) =>
-    leastGroup({ ...task, backfill: { ...backfill, heelShare } }, ground, levels),
+    leastGroup({ ...task, backfill: { ...backfill, heelShare } }, ground, levels, reach),
   );
   return (
     tried.reduce((a, b) => (a === null || (b !== null && b.effort < a.effort) ? b : a), null)?.group ?? null
@@ -60,6 +110,7 @@ function leastGroup(
   task: FootTask,
   ground: GroundFigures,
   levels: PileLevels,
+  reach: number,
 ): { readonly group: PileGroup; readonly effort: number } | null {
   const { piles } = substructureData;
   let best: PileGroup | null = null;
@@ -109,11 +160,11 @@ function leastGroup(
           depthM,
           undersideM,
         });
-        if (need === null) continue;
+        if (need === null || need > reach * piles.longestInStratumM) continue;
         const startM = Math.min(levels.bearingLevelM, levels.scouredLevelM, undersideM);
         const toeLevelM = startM - need;
         const pileLength = undersideM - toeLevelM;
-        if (pileLength > piles.mostDiameters * diameterM) continue;
+        if (pileLength > reach * piles.mostDiameters * diameterM) continue;
         const effort = capVolume + n * (pileLength * area + piles.perPileM3);
         if (effort < least) {
           least = effort;
@@ -167,5 +218,5 @@ function stratumLength(task: FootTask, ground: GroundFigures, trial: Trial): num
     const forUplift = (-least * piles.safety) / (piles.tensionShare * ground.shaftKPa * perimeter);
     inStratum = Math.max(inStratum, forLoad, forUplift);
   }
-  return inStratum > piles.longestInStratumM ? null : inStratum;
+  return inStratum;
 }

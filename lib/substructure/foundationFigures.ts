@@ -211,6 +211,15 @@ export const foundationFigures: readonly Descriptor[] = [
     }),
   ),
   described({
+    path: foundation('overload'),
+    label: onGround('overload of the piles'),
+    unit: '',
+    method: 'least multiple, by halving',
+    formula:
+      'how many times its allowable load and its longest length a pile of the lightest group would need',
+    inputs: (at) => ({ ...loads(at), stratum: stratum(at), safety: piles('safety') }),
+  }),
+  described({
     path: foundation('piles/toeLevelM'),
     label: onGround('level of the pile toes'),
     unit: 'm',

@@ -1,5 +1,5 @@
 import type { Foundation, GroundOdds, MeasuredLine } from '../model/index.ts';
-import { boredPiles } from './boredPiles.ts';
+import { pilesOrNearest } from './boredPiles.ts';
 import type { GroundFigures } from './data.ts';
 import { substructureData } from './data.ts';
 import type { FoundationTask } from './foot.ts';
@@ -10,7 +10,7 @@ import { pitLines } from './pitLines.ts';
 /**
  * The foundation of a support for one ground class the stretch may turn out to be.
  * Spread where the bearing stratum, least depth and scour allow a footing within 5 m of the ground, else bored piles.
- * Throws a RangeError when neither carries the loads, naming the support and the ground.
+ * Where neither carries the loads, the group that comes nearest with its overload: the rules put the option out for it.
  */
 export function foundationFor(task: FoundationTask, odds: GroundOdds): Foundation {
   const ground = substructureData.ground[odds.ground];
@@ -18,13 +18,11 @@ export function foundationFor(task: FoundationTask, odds: GroundOdds): Foundatio
   const spread = spreadWhere(task, ground, odds.bearingLevelM, scouredLevelM);
   if (spread !== null) return spreadFoundation(task, odds, spread);
   const capTopM = task.groundLevelM - substructureData.piles.capCoverM;
-  const group = boredPiles(task, ground, { capTopM, bearingLevelM: odds.bearingLevelM, scouredLevelM });
-  if (group === null) {
-    const most = Math.max(...task.combos.map((combo) => combo.verticalKN));
-    throw new RangeError(
-      `${task.name}: expected loads that a footing or a group of bored piles carries on ${odds.ground}, received ${Math.round(most)} kN; shorten the spans next to it or move it`,
-    );
-  }
+  const { group, overload } = pilesOrNearest(task, ground, {
+    capTopM,
+    bearingLevelM: odds.bearingLevelM,
+    scouredLevelM,
+  });
   const count = group.rowsAlong * group.rowsAcross;
   const { cap, diameterM, lengthM, toeLevelM } = group;
   const pileM3 = (count * lengthM * Math.PI * diameterM * diameterM) / 4;
@@ -57,6 +55,7 @@ export function foundationFor(task: FoundationTask, odds: GroundOdds): Foundatio
     kind: 'bored-piles',
     footing: { ...cap, topLevelM: capTopM },
     piles: { count, diameterM, lengthM, toeLevelM },
+    ...(overload > 1 ? { overload } : {}),
     lines: [...lines, ...shaftBelow(task, base, capTopM)],
   };
 }

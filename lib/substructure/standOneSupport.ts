@@ -6,7 +6,7 @@ import type { SupportAsk } from './supportAsk.ts';
 /**
  * One support with shaft or walls, articulation and a foundation for every ground class of its stretch.
  * The one way a support is sized, in an option and in the cost table alike. Loads in `ask` are characteristic, kN.
- * Throws a RangeError when a load is not a number or no foundation carries it.
+ * Throws a RangeError when a load is not a number.
  */
 export function standOneSupport(site: Site, ask: SupportAsk): Support {
   for (const key of [

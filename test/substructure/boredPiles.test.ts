@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { boredPiles, pileCapacity } from '../../lib/substructure/boredPiles.ts';
+import { boredPiles, pileCapacity, pilesOrNearest } from '../../lib/substructure/boredPiles.ts';
 import { substructureData } from '../../lib/substructure/data.ts';
 import type { FootTask } from '../../lib/substructure/foot.ts';
 import { demandAt } from '../../lib/substructure/foot.ts';
@@ -76,4 +76,31 @@ it('boredPiles(under a wall) never spreads wider than the wall with two diameter
   };
   const group = boredPiles(wall, substructureData.ground['soft-clay'], levels)!;
   expect(group.cap.widthM).toBeLessThanOrEqual(12 + 2 * group.diameterM);
+});
+
+const gravel = substructureData.ground.gravel;
+
+it('pilesOrNearest(more than any group carries) is the group of so many times stronger piles, and says how many', () => {
+  const within = pilesOrNearest(task, gravel, levels);
+  expect(within).toEqual({ group: boredPiles(task, gravel, levels), overload: 1 });
+  const heavy = {
+    ...task,
+    combos: task.combos.map((combo) => ({ ...combo, verticalKN: 100 * combo.verticalKN })),
+  };
+  expect(boredPiles(heavy, gravel, levels)).toBeNull();
+  const found = pilesOrNearest(heavy, gravel, levels);
+  expect(found.overload).toBeGreaterThan(1);
+  // The multiple is least: piles a twentieth weaker have no group.
+  const weaker = {
+    ...heavy,
+    combos: heavy.combos.map((combo) => ({ ...combo, capacity: 0.95 * found.overload * combo.capacity })),
+  };
+  expect(boredPiles(weaker, gravel, levels, 0.95 * found.overload)).toBeNull();
+});
+
+it('pilesOrNearest(bearing stratum out of reach) measures how far it is', () => {
+  const deep = pilesOrNearest(task, gravel, { ...levels, bearingLevelM: -160 });
+  // Longest pile 25 diameters of 2 m.
+  expect(deep.overload).toBeGreaterThan(2);
+  expect(deep.group.lengthM).toBeGreaterThan(150);
 });
