@@ -6,6 +6,7 @@ import fatigue from '../../data/forms/fatigue.json';
 import floor from '../../data/forms/floor.json';
 import plates from '../../data/forms/plates.json';
 import precastI from '../../data/forms/precast-i.json';
+import pretensioned from '../../data/forms/pretensioned.json';
 import slab from '../../data/forms/slab.json';
 import slabDeck from '../../data/forms/slab-deck.json';
 import truss from '../../data/forms/truss.json';
@@ -37,6 +38,7 @@ const files: Readonly<Record<string, unknown>> = {
   'composite-box': compositeBox,
   'concrete-box': concreteBox,
   'precast-i': precastI,
+  pretensioned,
   truss,
   'cable-stayed': cableStayed,
 };

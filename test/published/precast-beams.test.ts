@@ -1,13 +1,14 @@
 import { describe, expect, it } from 'vitest';
-import { beamMoments, noMoments } from '../../lib/forms/precast-i/beamMoments.ts';
+import { beamMoments, noMoments } from '../../lib/forms/common/precast/beamMoments.ts';
 import { catalogue, catalogueBeam } from '../../lib/forms/precast-i/beamShapes.ts';
-import { precastModel } from '../../lib/forms/precast-i/precastModel.ts';
-import { sizeStrands } from '../../lib/forms/precast-i/sizeStrands.ts';
-import { spanUse } from '../../lib/forms/precast-i/spanUse.ts';
-import { strandBending } from '../../lib/forms/precast-i/strandBending.ts';
-import { strandLosses } from '../../lib/forms/precast-i/strandLosses.ts';
-import { strandPlan } from '../../lib/forms/precast-i/strandPlan.ts';
-import { strandCentroidM } from '../../lib/forms/precast-i/strandRows.ts';
+import { precastModel } from '../../lib/forms/common/precast/precastModel.ts';
+import { iBeams } from '../../lib/forms/precast-i/iBeams.ts';
+import { sizeStrands } from '../../lib/forms/common/precast/sizeStrands.ts';
+import { spanUse } from '../../lib/forms/common/precast/spanUse.ts';
+import { strandBending } from '../../lib/forms/common/precast/strandBending.ts';
+import { strandLosses } from '../../lib/forms/common/precast/strandLosses.ts';
+import { strandPlan } from '../../lib/forms/common/precast/strandPlan.ts';
+import { strandCentroidM } from '../../lib/forms/common/precast/strandRows.ts';
 import { fhwa, inch, kip, kipFoot, klf, ksi, pci } from '../forms/precast-i/cases.ts';
 
 const ratio = (ours: number, published: number): number => ours / published - 1;
@@ -33,7 +34,7 @@ describe('published I-girders', () => {
 /** PCI Bridge Design Manual, example 9.1a; published values from memory, most of them worked out again independently. */
 describe('PCI example 9.1a, BT-72 over 120 ft', () => {
   // The example has no diaphragms within its span.
-  const model = { ...precastModel(pci.task, pci.choice, 2), diaphragmKN: 0 };
+  const model = { ...precastModel(iBeams, pci.task, pci.choice, 2), diaphragmKN: 0 };
   const middle = noMoments();
   beamMoments(model, 0, 5, middle);
 
@@ -89,7 +90,7 @@ describe('PCI example 9.1a, BT-72 over 120 ft', () => {
 
 /** FHWA comprehensive design example NHI-04-043: geometry and loads read, results from memory. */
 describe('FHWA example, AASHTO VI, two spans of 110 ft', () => {
-  const model = precastModel(fhwa.task, fhwa.choice, 2);
+  const model = precastModel(iBeams, fhwa.task, fhwa.choice, 2);
 
   it('precastModel(task, choice, girder) gives the published loads and factors', () => {
     const middle = noMoments();

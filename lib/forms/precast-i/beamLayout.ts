@@ -1,14 +1,6 @@
 import type { UnitTask } from '../../model/index.ts';
+import type { BeamLayout } from '../common/precast/beamChoice.ts';
 import { precastData } from './precastData.ts';
-
-/** Where the beams of a deck stand. */
-export interface BeamLayout {
-  readonly count: number;
-  readonly spacingM: number;
-  readonly overhangM: number;
-  /** From the middle of the deck, left to right, m. */
-  readonly offsetsM: readonly number[];
-}
 
 /** `count` beams evenly across a deck, the overhang a share of the spacing. */
 export function beamLayout(widthM: number, count: number): BeamLayout {

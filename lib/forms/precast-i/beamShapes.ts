@@ -1,28 +1,9 @@
 import { z } from 'zod';
 import json from '../../../data/girders/aashto-pci.json';
-import { polygonProperties, type SectionPoint } from '../../mechanics/index.ts';
+import type { SectionPoint } from '../../mechanics/index.ts';
 import type { StandardId } from '../../model/index.ts';
+import { beamShape, deepestWithin, type BeamShape } from '../common/precast/beamShape.ts';
 import { precastData } from './precastData.ts';
-import { strandRows, type StrandRow } from './strandRows.ts';
-
-/** A precast beam: outline, section and where its strands fit. Lengths m, z up from the soffit. */
-export interface BeamShape {
-  readonly name: string;
-  readonly depthM: number;
-  readonly webM: number;
-  readonly topWidthM: number;
-  readonly bottomWidthM: number;
-  /** Height of the full bottom flange, m. */
-  readonly bottomFlangeM: number;
-  readonly points: readonly SectionPoint[];
-  readonly areaM2: number;
-  readonly centroidM: number;
-  readonly inertiaM4: number;
-  readonly inertiaYM4: number;
-  readonly perimeterM: number;
-  /** Rows from the bottom up. */
-  readonly rows: readonly StrandRow[];
-}
 
 const point = z.tuple([z.number(), z.number()]);
 const girder = z.object({
@@ -42,26 +23,29 @@ export const catalogue = z.object({ girders: z.array(girder).min(1) }).parse(jso
 const inch = 0.0254;
 
 /** Beam of a profile of [height, full width] pairs from the soffit up, m. */
-function beamShape(
+function profiled(
   name: string,
   profile: readonly (readonly [number, number])[],
   standard: StandardId,
 ): BeamShape {
   const right = profile.map(([z, width]): SectionPoint => [width / 2, z]);
   const left = [...profile].reverse().map(([z, width]): SectionPoint => [-width / 2, z]);
-  const points = [...right, ...left];
-  const depthM = profile[profile.length - 1]![0];
-  return {
-    name,
-    depthM,
-    webM: Math.min(...profile.map(([, width]) => width)),
-    topWidthM: profile[profile.length - 1]![1],
-    bottomWidthM: profile[0]![1],
-    bottomFlangeM: profile[1]![0],
-    points,
-    ...polygonProperties(points),
-    rows: strandRows(points, depthM, standard),
-  };
+  const [depthM, topWidthM] = profile[profile.length - 1]!;
+  return beamShape(
+    {
+      name,
+      depthM,
+      webM: Math.min(...profile.map(([, width]) => width)),
+      topWidthM,
+      seats: [[-topWidthM / 2, topWidthM / 2]],
+      acrossM: topWidthM,
+      bottomWidthM: profile[0]![1],
+      bottomFlangeM: profile[1]![0],
+      points: [...right, ...left],
+      holes: [],
+    },
+    standard,
+  );
 }
 
 /** The published girder of that name. @throws RangeError for a name that is not in the catalogue */
@@ -71,7 +55,7 @@ export function catalogueBeam(name: string): BeamShape {
     throw new RangeError(
       `girder: expected one of ${catalogue.map((one) => one.name).join(', ')}, received ${name}`,
     );
-  return beamShape(
+  return profiled(
     name,
     found.profileIn.map(([z, width]) => [z * inch, width * inch] as const),
     'hl93',
@@ -84,7 +68,7 @@ export function bulbTee(depthM: number, standard: StandardId): BeamShape {
   const bottom = d.bottomWidthM.base + d.bottomWidthM.perDepth * depthM;
   const top = d.topWidthM.base + d.topWidthM.perDepth * depthM;
   const taper = (d.bottomTaper * (bottom - d.webM)) / 2;
-  return beamShape(
+  return profiled(
     `bulb-tee ${(depthM * 1000).toFixed(0)}`,
     [
       [0, bottom],
@@ -121,8 +105,5 @@ export function beamShapes(standard: StandardId): readonly BeamShape[] {
 
 /** The deepest beams no deeper than `mostM`; the shallowest there is where none fits. */
 export function beamsFor(standard: StandardId, mostM: number): readonly BeamShape[] {
-  const all = beamShapes(standard);
-  const fitting = all.filter(({ depthM }) => depthM <= mostM + 1e-6);
-  const depthM = fitting.length > 0 ? fitting[fitting.length - 1]!.depthM : all[0]!.depthM;
-  return all.filter((shape) => Math.abs(shape.depthM - depthM) < 1e-6);
+  return deepestWithin(beamShapes(standard), mostM);
 }

@@ -18,14 +18,14 @@ export const precastCheckFigures: readonly Descriptor[] = [
       'P (1 / A + e / Wb) after losses + tension allowed',
       'span*Strands',
       'span*LossesMPa',
-      'data/precast-i/service/tensionMPa/:standard',
+      'data/pretensioned/service/tensionMPa/:standard',
     ],
     'EN 1992-2, AASHTO LRFD 5.9.2.3 (from memory)',
   ),
   ...check(
     'service-compression',
     ['stress of the top of the beam under everything, characteristic', 'span*SimpleKNm', 'span*Strands'],
-    ['share of the cylinder strength', 'data/precast-i/service/compression/:standard'],
+    ['share of the cylinder strength', 'data/pretensioned/service/compression/:standard'],
   ),
   ...check(
     'bending',
@@ -38,13 +38,13 @@ export const precastCheckFigures: readonly Descriptor[] = [
     ['P (e / Wt - 1 / A) - M / Wt at release', 'span*Strands', 'span*TopStrands'],
     [
       'tension with bars, by the root of the strength at release',
-      'data/precast-i/release/tensionRootMPa/:standard',
+      'data/pretensioned/release/tensionRootMPa/:standard',
     ],
   ),
   ...check(
     'release-bottom',
     ['P (1 / A + e / Wb) - M / Wb at release', 'span*Strands', 'span*RelievedStrands'],
-    ['share of the strength at release', 'data/precast-i/release/compression/:standard'],
+    ['share of the strength at release', 'data/pretensioned/release/compression/:standard'],
   ),
   ...check(
     'web-struts',
@@ -63,24 +63,24 @@ export const precastCheckFigures: readonly Descriptor[] = [
   ),
   ...check(
     'lifting',
-    ['least safety', 'data/precast-i/lifting/leastSafety'],
+    ['least safety', 'data/pretensioned/lifting/leastSafety'],
     ['safety of the longest beam while it hangs', 'liftingSafety'],
     'Mast, PCI Journal 1989 and 1993 (from memory)',
   ),
   ...check(
     'hauled-length',
     ['longest beam', 'spans'],
-    ['longest that is hauled', 'data/precast-i/haul/lengthM'],
+    ['longest that is hauled', 'data/pretensioned/haul/lengthM'],
   ),
   ...check(
     'hauled-mass',
     ['weight of a beam x its length', 'ownKNm', 'spans'],
-    ['heaviest that is hauled', 'data/precast-i/haul/massT'],
+    ['heaviest that is hauled', 'data/pretensioned/haul/massT'],
   ),
   ...check(
     'pier-bars',
     ['bars over the area of the slab that acts with a beam', 'pier*BarsM2', 'slabM', 'spacingM'],
-    ['most bars that can be placed', 'data/precast-i/continuity/mostRatio'],
+    ['most bars that can be placed', 'data/pretensioned/continuity/mostRatio'],
   ),
   ...check(
     'pier-compression',

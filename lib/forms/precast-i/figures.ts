@@ -56,7 +56,7 @@ export const precastManual: readonly Descriptor[] = [
     'spans',
     'data/precast-i/layout/leastSpacingM',
     'data/precast-i/layout/mostSpacingM',
-    'data/precast-i/proxy/strandKgPerM3',
+    'data/pretensioned/proxy/strandKgPerM3',
   ),
   figure('spacingM', {
     label: 'spacing of the beams',
@@ -101,7 +101,7 @@ export const precastManual: readonly Descriptor[] = [
     unit: 'm',
     method: 'figure of practice',
     formula: 'taken as it is',
-    inputs: () => ({ fill: 'data/precast-i/haunchM' }),
+    inputs: () => ({ fill: 'data/pretensioned/haunchM' }),
     compute: ({ fill }) => fill,
   }),
   sized(
@@ -205,8 +205,8 @@ export const precastManual: readonly Descriptor[] = [
     'spans',
     'ownKNm',
     'topFlangeWidthM',
-    'data/precast-i/lifting/sweepOverLength',
-    'data/precast-i/lifting/overhangShare',
+    'data/pretensioned/lifting/sweepOverLength',
+    'data/pretensioned/lifting/overhangShare',
   ),
   perM2(
     'concreteM3M2',
@@ -225,7 +225,7 @@ export const precastManual: readonly Descriptor[] = [
     unit: 'kg',
     method: 'ratio',
     formula: 'kg per m3 x concrete of the beams',
-    inputs: (at) => ({ ratio: 'data/precast-i/beamBars/alongKgM3', beams: linesOf(at, 'precast beams') }),
+    inputs: (at) => ({ ratio: 'data/pretensioned/beamBars/alongKgM3', beams: linesOf(at, 'precast beams') }),
     compute: ({ ratio, beams }) => ratio * sum(beams),
   }),
   line('bars of the diaphragms', {

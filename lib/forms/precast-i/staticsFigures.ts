@@ -69,7 +69,7 @@ export const staticsFigures: readonly Descriptor[] = [
     'span#SuperimposedKNm',
     'span#TrafficKNm',
     'beamHeightM',
-    'data/precast-i/service/tensionMPa/:standard',
+    'data/pretensioned/service/tensionMPa/:standard',
   ),
   sized(
     'span*RelievedStrands',
@@ -77,7 +77,7 @@ export const staticsFigures: readonly Descriptor[] = [
     'no',
     'fewest that the ends can stand at release',
     'span#Strands',
-    'data/precast-i/relief/mostShare/:standard',
+    'data/pretensioned/relief/debonded/mostShare',
   ),
   sized(
     'span*TopStrands',
@@ -85,7 +85,7 @@ export const staticsFigures: readonly Descriptor[] = [
     'no',
     'fewest pairs that hold the top of the beam at release',
     'span#Strands',
-    'data/precast-i/strand/mostTop',
+    'data/pretensioned/strand/mostTop',
   ),
   sized(
     'span*StrandHeightM',
@@ -93,8 +93,8 @@ export const staticsFigures: readonly Descriptor[] = [
     'm',
     'rows of the strand grid filled from the bottom',
     'span#Strands',
-    'data/precast-i/strand/pitchM/:standard',
-    'data/precast-i/strand/axisM/:standard',
+    'data/pretensioned/strand/pitchM/:standard',
+    'data/pretensioned/strand/axisM/:standard',
   ),
   sized(
     'span*LossesMPa',
@@ -103,7 +103,7 @@ export const staticsFigures: readonly Descriptor[] = [
     'elastic shortening, shrinkage, creep and relaxation at midspan',
     'span#Strands',
     'ownKNm',
-    'data/precast-i/strand/jacking/:standard',
+    'data/pretensioned/strand/jacking/:standard',
   ),
   sized(
     'pier*HogDesignKNm',
@@ -121,7 +121,7 @@ export const staticsFigures: readonly Descriptor[] = [
     'm2',
     'M / (z fyd) at ultimate or M / (z sigma) in service, whichever is more',
     'pier#HogDesignKNm',
-    'data/precast-i/continuity/barAxisM',
+    'data/pretensioned/continuity/barAxisM',
     'data/slab/serviceStressMPa/:standard',
   ),
 ];

@@ -1,6 +1,6 @@
 import type { SlabDesign } from '../../../lib/forms/common/slab/designSlab.ts';
 import { catalogueBeam } from '../../../lib/forms/precast-i/beamShapes.ts';
-import type { BeamChoice } from '../../../lib/forms/precast-i/beamChoice.ts';
+import type { BeamChoice } from '../../../lib/forms/common/precast/beamChoice.ts';
 import type { UnitTask } from '../../../lib/model/index.ts';
 
 export const foot = 0.3048;

@@ -3,10 +3,11 @@ import { quantityOf } from '../../../lib/forms/common/measured.ts';
 import { beamsFor, beamShapes, bulbTee } from '../../../lib/forms/precast-i/beamShapes.ts';
 import { rankedChoices } from '../../../lib/forms/precast-i/chooseBeams.ts';
 import { precastI } from '../../../lib/forms/precast-i/index.ts';
-import { precastModel, type PrecastModel } from '../../../lib/forms/precast-i/precastModel.ts';
-import { strandLosses } from '../../../lib/forms/precast-i/strandLosses.ts';
-import { strandPlan, strandsAt } from '../../../lib/forms/precast-i/strandPlan.ts';
-import { releaseUse } from '../../../lib/forms/precast-i/spanUse.ts';
+import { precastModel, type PrecastModel } from '../../../lib/forms/common/precast/precastModel.ts';
+import { iBeams } from '../../../lib/forms/precast-i/iBeams.ts';
+import { strandLosses } from '../../../lib/forms/common/precast/strandLosses.ts';
+import { strandPlan, strandsAt } from '../../../lib/forms/common/precast/strandPlan.ts';
+import { releaseUse } from '../../../lib/forms/common/precast/spanUse.ts';
 import type { StandardId, UnitTask } from '../../../lib/model/index.ts';
 import { catalogueBeam } from '../../../lib/forms/precast-i/beamShapes.ts';
 
@@ -35,7 +36,7 @@ function task(
   };
 }
 
-const modelOf = (asked: UnitTask): PrecastModel => precastModel(asked, rankedChoices(asked)[0]!);
+const modelOf = (asked: UnitTask): PrecastModel => precastModel(iBeams, asked, rankedChoices(asked)[0]!);
 
 describe('precastI.size(task)', () => {
   it('holds every check over usual spans at usual depths, within the published quantities', () => {

@@ -1,6 +1,6 @@
-import { slabData } from '../common/slab/slabData.ts';
-import { barDesignMPa } from '../common/bars.ts';
-import { precastData } from './precastData.ts';
+import { slabData } from '../slab/slabData.ts';
+import { barDesignMPa } from '../bars.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 
 /** Continuity over one inner support, of one beam. */
@@ -24,12 +24,12 @@ export function pierContinuity(model: PrecastModel, pier: number): PierContinuit
   const { composite, shape, slabConcrete, standard, standardId } = model;
   const station = model.beam.supportAt[pier]!;
   const { uls } = standard.factors;
-  const { topCoolerK, withTraffic } = precastData.temperature;
+  const { topCoolerK, withTraffic } = pretensioned.temperature;
   const lasting = -model.superimposed.momentKNm[station]!;
   const traffic = -model.most.momentMinKNm[station]!;
   const cool = topCoolerK * withTraffic[standardId] * Math.abs(model.warmth.momentKNm[station]!);
   const hogDesignKNm = Math.max(0, uls.superimposed * lasting + uls.traffic * traffic);
-  const d = composite.topM - precastData.continuity.barAxisM;
+  const d = composite.topM - pretensioned.continuity.barAxisM;
   const most = slabConcrete.fcdMPa * 1e3 * shape.bottomWidthM;
   const rest = d * d - (2 * hogDesignKNm) / most;
   const blockM = rest > 0 ? d - Math.sqrt(rest) : d;
@@ -38,7 +38,7 @@ export function pierContinuity(model: PrecastModel, pier: number): PierContinuit
     hogDesignKNm / (lever * barDesignMPa(standardId) * 1e3),
     (lasting + traffic + cool) / (lever * slabData.serviceStressMPa[standardId] * 1e3),
   );
-  const cracking = precastData.continuity.crackingTimes * slabConcrete.fctmMPa * 1e3 * composite.wBottomM3;
+  const cracking = pretensioned.continuity.crackingTimes * slabConcrete.fctmMPa * 1e3 * composite.wBottomM3;
   const bottomBarsM2 = cracking / (0.9 * composite.topM * barDesignMPa(standardId) * 1e3);
   return {
     hogDesignKNm,

@@ -1,6 +1,6 @@
-import { webShear } from '../concrete-box/webShear.ts';
+import { webShear } from '../../concrete-box/webShear.ts';
 import { beamMoments, diaphragmsWithin, noMoments } from './beamMoments.ts';
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import { elementsPerSpan, type PrecastModel } from './precastModel.ts';
 import { strandsAt, type StrandPlan, type StrandsThere } from './strandPlan.ts';
 
@@ -30,17 +30,19 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
   const first = model.beam.supportAt[span]!;
   const heightM = composite.topM;
   const force = plan.count * model.strandM2 * plan.stress.lastingMPa;
-  const kind = precastData.relief.kind[standardId];
-  const rise =
-    kind === 'draped' ? (plan.endM - plan.midM) / (precastData.relief.endOver[standardId] * spanM) : 0;
-  const leastM2PerM = precastData.beamBars.leastLinksM2PerM;
+  const kind = model.kind.relief[standardId];
+  const { endOver } = pretensioned.relief[kind];
+  const rise = kind === 'draped' ? (plan.endM - plan.midM) / (endOver * spanM) : 0;
+  // Torsion of a closed cell loads one web up by T z / 2 A and the other down: as if both carried T z / A of shear.
+  const twist = model.torsion ? (model.torsion.armM * shape.depthM) / model.torsion.cellM2 : 0;
+  const leastM2PerM = pretensioned.beamBars.leastLinksM2PerM;
   let mostKN = 0;
   let crushing = 0;
   let crowding = 0;
   let linksM2 = 0;
   for (let e = 0; e < elementsPerSpan; e++) {
     const middle = Math.min(e + 0.5, elementsPerSpan - e - 0.5);
-    const sloped = middle / elementsPerSpan < precastData.relief.endOver[standardId];
+    const sloped = middle / elementsPerSpan < endOver;
     const carried = sloped ? uls.prestress * 1e3 * force * rise : 0;
     let shearKN = 0;
     for (const i of [e, e + 1]) {
@@ -64,7 +66,11 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
         const lasting =
           uls.permanent * own + uls.superimposed * (added - Math.sign(added) * model.superimposedKNm * away);
         for (const traffic of [envelope.shearMaxKN[at]!, envelope.shearMinKN[at]!])
-          shearKN = Math.max(shearKN, Math.abs(lasting + uls.traffic * traffic - towards * carried));
+          shearKN = Math.max(
+            shearKN,
+            Math.abs(lasting + uls.traffic * traffic - towards * carried) +
+              uls.traffic * twist * Math.abs(traffic),
+          );
       }
     }
     mostKN = Math.max(mostKN, shearKN);
@@ -88,7 +94,7 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
 
 /** Shear of the diaphragms within a simple span at x, kN; the mean of both sides under a diaphragm. */
 function diaphragmShear(model: PrecastModel, spanM: number, x: number): number {
-  const count = diaphragmsWithin(spanM);
+  const count = diaphragmsWithin(model, spanM);
   let shear = (count * model.diaphragmKN) / 2;
   for (let k = 1; k <= count; k++) {
     const past = x - (spanM * k) / (count + 1);

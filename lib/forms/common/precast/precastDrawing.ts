@@ -1,9 +1,9 @@
-import type { SectionCut, Shape } from '../../model/index.ts';
-import { constantDepth } from '../common/depthAlong.ts';
-import { deckFace, upright } from '../common/elevation.ts';
-import { deckFurniture } from '../common/furniture.ts';
+import type { SectionCut, Shape } from '../../../model/index.ts';
+import { constantDepth } from '../depthAlong.ts';
+import { deckFace, upright } from '../elevation.ts';
+import { deckFurniture } from '../furniture.ts';
 import { diaphragmsWithin } from './beamMoments.ts';
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 import type { SizedBeams } from './sizeBeams.ts';
 
@@ -28,7 +28,7 @@ export function precastElevation(model: PrecastModel, beams: SizedBeams): Shape[
     const flange = topM + shape.depthM - shape.bottomFlangeM;
     shapes.push({ ...levelLine('bottom flange', from, from + spanM, flange), faint: true });
     shapes.push({ ...strandLine(model, span, beams), faint: true });
-    const count = diaphragmsWithin(spanM);
+    const count = diaphragmsWithin(model, spanM);
     for (let k = 1; k <= count; k++)
       shapes.push(
         upright(
@@ -37,12 +37,12 @@ export function precastElevation(model: PrecastModel, beams: SizedBeams): Shape[
           whole,
           from + (spanM * k) / (count + 1),
           topM,
-          precastData.diaphragm.withinM,
+          model.kind.diaphragm.withinM,
         ),
       );
   });
   for (const x of supportsM.slice(1, -1))
-    shapes.push(upright('diaphragm', 'concrete', whole, x, topM, precastData.diaphragm.pierM));
+    shapes.push(upright('diaphragm', 'concrete', whole, x, topM, model.kind.diaphragm.pierM));
   return shapes;
 }
 
@@ -65,7 +65,7 @@ function strandLine(model: PrecastModel, span: number, beams: SizedBeams): Shape
   const from = model.supportsM[span]!;
   const spanM = model.task.spansM[span]!;
   const soffit = -structuralDepthM(model);
-  const bend = precastData.relief.endOver[model.standardId] * spanM;
+  const bend = pretensioned.relief[model.kind.relief[model.standardId]].endOver * spanM;
   return {
     part: 'strands',
     material: 'strand',
@@ -81,18 +81,18 @@ function strandLine(model: PrecastModel, span: number, beams: SizedBeams): Shape
 }
 
 /** Cross-sections at the middle of the longest span and, on continuous units, beside an inner support. */
-export function precastSections(model: PrecastModel): SectionCut[] {
+export function precastSections(model: PrecastModel, more: readonly Shape[]): SectionCut[] {
   const { spansM } = model.task;
   const longest = spansM.indexOf(Math.max(...spansM));
-  const cuts = [cut(model, 'midspan', model.supportsM[longest]! + spansM[longest]! / 2, false)];
+  const cuts = [cut(model, 'midspan', model.supportsM[longest]! + spansM[longest]! / 2, false, more)];
   if (spansM.length > 1) {
     const pier = longest > 0 ? longest : 1;
-    cuts.push(cut(model, 'pier', model.supportsM[pier]!, true));
+    cuts.push(cut(model, 'pier', model.supportsM[pier]!, true, more));
   }
   return cuts;
 }
 
-function cut(model: PrecastModel, at: string, xM: number, pier: boolean): SectionCut {
+function cut(model: PrecastModel, at: string, xM: number, pier: boolean, more: readonly Shape[]): SectionCut {
   const { layout, shape, haunchM } = model;
   const soffit = -structuralDepthM(model);
   const shapes: Shape[] = [];
@@ -110,19 +110,26 @@ function cut(model: PrecastModel, at: string, xM: number, pier: boolean): Sectio
       part: 'beam',
       material: 'concrete',
       kind: 'polygon',
-      points: shape.points.map(([x, z]): Point => [y + x, soffit + z]),
+      points: moved(shape.points, y, soffit),
+      ...(shape.holes.length > 0 ? { holes: shape.holes.map((hole) => moved(hole, y, soffit)) } : {}),
     });
     const top = soffit + shape.depthM;
-    shapes.push({
-      part: 'fill',
-      material: 'concrete',
-      kind: 'polygon',
-      points: box(y - shape.topWidthM / 2, y + shape.topWidthM / 2, top, top + haunchM),
-    });
+    if (haunchM > 0)
+      for (const [from, to] of shape.seats)
+        shapes.push({
+          part: 'fill',
+          material: 'concrete',
+          kind: 'polygon',
+          points: box(y + from, y + to, top, top + haunchM),
+        });
   }
   shapes.push({ part: 'slab', material: 'concrete', kind: 'polygon', points: slabOutline(model) });
-  shapes.push(...deckFurniture(model.task.deck));
+  shapes.push(...more, ...deckFurniture(model.task.deck));
   return { at, xM, shapes };
+}
+
+function moved(points: readonly Point[], y: number, z: number): Point[] {
+  return points.map(([x, up]): Point => [y + x, z + up]);
 }
 
 function box(x1: number, x2: number, z1: number, z2: number): Point[] {
@@ -138,7 +145,7 @@ function box(x1: number, x2: number, z1: number, z2: number): Point[] {
 function slabOutline(model: PrecastModel): Point[] {
   const { slab, layout, task, shape } = model;
   const half = task.deck.widthM / 2;
-  const seat = Math.min(half, layout.offsetsM[layout.count - 1]! + shape.topWidthM / 2);
+  const seat = Math.min(half, layout.offsetsM[layout.count - 1]! + shape.acrossM / 2);
   return [
     [-half, 0],
     [half, 0],

@@ -1,6 +1,6 @@
-import type { SectionPoint } from '../../mechanics/index.ts';
-import type { StandardId } from '../../model/index.ts';
-import { precastData } from './precastData.ts';
+import type { SectionPoint } from '../../../mechanics/index.ts';
+import type { StandardId } from '../../../model/index.ts';
+import { pretensioned } from './pretensioned.ts';
 
 /** One level of the strand grid. */
 export interface StrandRow {
@@ -8,36 +8,47 @@ export interface StrandRow {
   readonly count: number;
 }
 
+/** What the grid has to fit in: outline and holes, m, z up from the soffit. */
+interface Grid {
+  readonly depthM: number;
+  readonly points: readonly SectionPoint[];
+  readonly holes: readonly (readonly SectionPoint[])[];
+}
+
 /**
  * Strands that fit in a beam, row by row from the bottom: a square grid, half a pitch either side of the middle, every
- * strand at least the axis distance from the outline (`points`, m). Rows above a share of the depth are left out.
+ * strand at least the axis distance from every face. Rows above a share of the depth are left out.
  */
-export function strandRows(
-  points: readonly SectionPoint[],
-  depthM: number,
-  standard: StandardId,
-): readonly StrandRow[] {
-  const { strand } = precastData;
+export function strandRows({ depthM, points, holes }: Grid, standard: StandardId): readonly StrandRow[] {
+  const { strand } = pretensioned;
   const pitch = strand.pitchM[standard];
   const axis = strand.axisM[standard];
+  const outM = Math.max(...points.map(([y]) => y));
   const rows: StrandRow[] = [];
   for (let z = axis; z <= strand.mostHeightShare * depthM + 1e-9; z += pitch) {
     let count = 0;
-    for (let y = pitch / 2; inside(points, y, z, axis); y += pitch) count += 2;
+    for (let y = pitch / 2; y < outM; y += pitch) if (inside(points, holes, y, z, axis)) count += 2;
     if (count > 0) rows.push({ zM: z, count });
   }
   return rows;
 }
 
-/** True for a point inside a symmetrical outline and at least `clear` from it. */
-function inside(points: readonly SectionPoint[], y: number, z: number, clear: number): boolean {
+/** True for a point inside an outline, outside its holes and at least `clear` from all of them. */
+function inside(
+  points: readonly SectionPoint[],
+  holes: readonly (readonly SectionPoint[])[],
+  y: number,
+  z: number,
+  clear: number,
+): boolean {
   let within = false;
-  for (let i = 0; i < points.length; i++) {
-    const [y0, z0] = points[i]!;
-    const [y1, z1] = points[(i + 1) % points.length]!;
-    if (z0 > z !== z1 > z && y < y0 + ((z - z0) / (z1 - z0)) * (y1 - y0)) within = !within;
-    if (distance(y, z, y0, z0, y1, z1) < clear - 1e-9) return false;
-  }
+  for (const ring of [points, ...holes])
+    for (let i = 0; i < ring.length; i++) {
+      const [y0, z0] = ring[i]!;
+      const [y1, z1] = ring[(i + 1) % ring.length]!;
+      if (z0 > z !== z1 > z && y < y0 + ((z - z0) / (z1 - z0)) * (y1 - y0)) within = !within;
+      if (distance(y, z, y0, z0, y1, z1) < clear - 1e-9) return false;
+    }
   return within;
 }
 

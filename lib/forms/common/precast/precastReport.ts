@@ -1,7 +1,7 @@
-import { trafficOnDeck, trafficOnInfluence } from '../../actions/index.ts';
-import { beamTrack, reactionInfluence } from '../../mechanics/index.ts';
-import type { MeasuredLine, SupportReaction } from '../../model/index.ts';
-import { quantityOf } from '../common/measured.ts';
+import { trafficOnDeck, trafficOnInfluence } from '../../../actions/index.ts';
+import { beamTrack, reactionInfluence } from '../../../mechanics/index.ts';
+import type { MeasuredLine, SupportReaction } from '../../../model/index.ts';
+import { quantityOf } from '../measured.ts';
 import { beamMoments, diaphragmsWithin, noMoments } from './beamMoments.ts';
 import { liftingSafety } from './liftingStability.ts';
 import { heaviestBeam } from './precastChecks.ts';
@@ -20,7 +20,7 @@ export function precastReactions(model: PrecastModel): SupportReaction[] {
     gamma * (layout.count * (shape.areaM2 + model.haunchM * shape.topWidthM) + slab.meanM * task.deck.widthM);
   const one = diaphragmM3(model);
   const half = task.spansM.map(
-    (spanM) => (ownKNm * spanM) / 2 + (gamma * one.withinM3 * diaphragmsWithin(spanM)) / 2,
+    (spanM) => (ownKNm * spanM) / 2 + (gamma * one.withinM3 * diaphragmsWithin(model, spanM)) / 2,
   );
   const deck = trafficOnDeck(task.standard, task.deck);
   const track = beamTrack(beam);

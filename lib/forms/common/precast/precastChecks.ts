@@ -1,9 +1,9 @@
-import { trafficOnDeck, trafficOnInfluence } from '../../actions/index.ts';
-import { beamTrack, deflectionInfluence } from '../../mechanics/index.ts';
-import type { Check } from '../../model/index.ts';
-import { check } from '../common/checks.ts';
+import { trafficOnDeck, trafficOnInfluence } from '../../../actions/index.ts';
+import { beamTrack, deflectionInfluence } from '../../../mechanics/index.ts';
+import type { Check } from '../../../model/index.ts';
+import { check } from '../checks.ts';
 import { liftingSafety } from './liftingStability.ts';
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import { elementsPerSpan, type PrecastModel } from './precastModel.ts';
 import type { SizedBeams } from './sizeBeams.ts';
 import type { Use } from './spanUse.ts';
@@ -16,7 +16,7 @@ export function precastChecks(model: PrecastModel, beams: SizedBeams): Check[] {
   const row = (id: string, label: string, { demand, capacity }: Use, unit: string): Check =>
     check(id, label, demand, capacity, unit);
   const greatest = (values: readonly number[]): number => Math.max(0, ...values);
-  const { haul, lifting, continuity } = precastData;
+  const { haul, lifting, continuity } = pretensioned;
   const piece = heaviestBeam(model);
   const checks = [
     row(

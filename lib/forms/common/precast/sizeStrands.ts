@@ -1,4 +1,4 @@
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 import { mostRelieved, strandLimit, strandPlan, type StrandPlan } from './strandPlan.ts';
 import { releaseUse, spanUse, type SpanUse } from './spanUse.ts';
@@ -17,7 +17,7 @@ const fewest = 4;
  */
 export function sizeStrands(model: PrecastModel, span: number): SpanStrands {
   let best = withTop(model, span, 0);
-  for (let top = 2; top <= precastData.strand.mostTop && !(best.use.releaseTop.use <= 1); top += 2) {
+  for (let top = 2; top <= pretensioned.strand.mostTop && !(best.use.releaseTop.use <= 1); top += 2) {
     const next = withTop(model, span, top);
     if (next.use.tension.use > 1 && best.use.tension.use <= 1) break;
     best = next;

@@ -1,5 +1,5 @@
 import { beamMoments, noMoments } from './beamMoments.ts';
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import { elementsPerSpan, type PrecastModel } from './precastModel.ts';
 import { strandBending } from './strandBending.ts';
 import { strandsAt, type StrandPlan, type StrandsThere } from './strandPlan.ts';
@@ -42,7 +42,7 @@ export function spanUse(model: PrecastModel, span: number, plan: StrandPlan): Sp
   const compression = none();
   const bending = none();
   const { shape, composite, standardId } = model;
-  const { service } = precastData;
+  const { service } = pretensioned;
   const wBottom = shape.inertiaM4 / shape.centroidM;
   const wTop = shape.inertiaM4 / (shape.depthM - shape.centroidM);
   for (let i = 1; i < elementsPerSpan; i++) {
@@ -72,7 +72,7 @@ export function releaseUse(
   const releaseTop = none();
   const releaseBottom = none();
   const { shape, standardId, releaseConcrete } = model;
-  const { release, relief } = precastData;
+  const { release, relief } = pretensioned;
   const spanM = model.task.spansM[span]!;
   const wBottom = shape.inertiaM4 / shape.centroidM;
   const wTop = shape.inertiaM4 / (shape.depthM - shape.centroidM);

@@ -1,5 +1,5 @@
-import { materials } from '../../actions/index.ts';
-import { precastData } from './precastData.ts';
+import { materials } from '../../../actions/index.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 
 /** Stress of the strands after release and after all losses, MPa. */
@@ -37,7 +37,7 @@ export function strandLosses(model: PrecastModel, count: number, eM: number, spa
 const ksi = 6.894757;
 
 function approximate(model: PrecastModel, areaM2: number): number {
-  const { humidity, relaxationMPa } = precastData.longTerm;
+  const { humidity, relaxationMPa } = pretensioned.longTerm;
   const moist = 1.7 - 0.01 * humidity;
   const strength = 5 / (1 + model.releaseConcrete.fckMPa / ksi);
   const creep = 10 * model.jackMPa * (areaM2 / model.shape.areaM2) * moist * strength;
@@ -52,7 +52,7 @@ function together(
   transferMPa: number,
   eMPa: number,
 ): number {
-  const { creep, shrinkage } = precastData.longTerm;
+  const { creep, shrinkage } = pretensioned.longTerm;
   const { shape, composite } = model;
   const force = areaM2 * transferMPa;
   const dead = ((model.ownKNm + model.wetKNm) * spanM ** 2) / 8 / 1e3;
@@ -74,6 +74,6 @@ function together(
 function relaxation(stressMPa: number, ultimateMPa: number): number {
   const mu = stressMPa / ultimateMPa;
   return (
-    0.66 * 100 * precastData.longTerm.relaxation1000 * Math.exp(9.1 * mu) * 500 ** (0.75 * (1 - mu)) * 1e-5
+    0.66 * 100 * pretensioned.longTerm.relaxation1000 * Math.exp(9.1 * mu) * 500 ** (0.75 * (1 - mu)) * 1e-5
   );
 }

@@ -1,5 +1,5 @@
-import { materials } from '../../actions/index.ts';
-import { precastData } from './precastData.ts';
+import { materials } from '../../../actions/index.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 
 /**
@@ -12,7 +12,7 @@ export function strandBending(model: PrecastModel, areaM2: number, zM: number): 
   const d = composite.topM - zM;
   if (!(areaM2 > 0 && d > 0)) return 0;
   const { ultimateMPa, proofMPa } = materials.strand[standardId];
-  const { deepestBlock, stressFallK } = precastData.ultimate;
+  const { deepestBlock, stressFallK } = pretensioned.ultimate;
   let stressMPa = proofMPa / model.standard.resistance.prestress;
   let blockMPa = slabConcrete.fcdMPa;
   if (standardId === 'hl93') {

@@ -1,4 +1,4 @@
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 
 /**
@@ -8,7 +8,7 @@ import type { PrecastModel } from './precastModel.ts';
  * the tilt at which the top flange cracks under its weight, held in pure bending about its weak axis.
  */
 export function liftingSafety(model: PrecastModel, lengthM: number): number {
-  const { lifting } = precastData;
+  const { lifting } = pretensioned;
   const { shape, releaseConcrete, standardId, ownKNm } = model;
   const a = lifting.overhangShare * lengthM;
   const l = lengthM - 2 * a;
@@ -22,8 +22,8 @@ export function liftingSafety(model: PrecastModel, lengthM: number): number {
   const yr = shape.depthM - shape.centroidM - lifting.camberOverLength * lengthM * bowed;
   if (!(yr > 0)) return 0;
   const moment = ((ownKNm * l * l) / 8 - (ownKNm * a * a) / 2) * lifting.impact;
-  const tension = precastData.release.tensionRootMPa[standardId] * Math.sqrt(releaseConcrete.fckMPa);
-  const sideways = (tension * 1e3 * 2 * shape.inertiaYM4) / shape.topWidthM;
+  const tension = pretensioned.release.tensionRootMPa[standardId] * Math.sqrt(releaseConcrete.fckMPa);
+  const sideways = (tension * 1e3 * 2 * shape.inertiaYM4) / shape.acrossM;
   const tmax = sideways / moment;
   return 1 / (z0 / yr + ti / yr / tmax);
 }

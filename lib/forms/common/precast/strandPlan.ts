@@ -1,4 +1,4 @@
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 import { strandLosses, type StrandStress } from './strandLosses.ts';
 import { mostStrands, strandCentroidM } from './strandRows.ts';
@@ -40,12 +40,12 @@ export function strandPlan(
 ): StrandPlan {
   const { shape, standardId } = model;
   const count = low + top;
-  const topM = shape.depthM - precastData.strand.axisM[standardId];
+  const topM = shape.depthM - pretensioned.strand.axisM[standardId];
   const lowM = strandCentroidM(shape.rows, low);
   const midM = (low * lowM + top * topM) / count;
   const stress = strandLosses(model, count, shape.centroidM - midM, spanM);
   if (relieved === 0) return { count, top, relieved, midM, endM: midM, stress };
-  if (precastData.relief.kind[standardId] === 'debonded') {
+  if (model.kind.relief[standardId] === 'debonded') {
     const endM = ((low - relieved) * lowM + top * topM) / (count - relieved);
     return { count, top, relieved, midM, endM, stress };
   }
@@ -54,17 +54,17 @@ export function strandPlan(
   // Pairs of the middle columns from the uppermost row used, raised to as many rows under the top.
   const lifted = rows.slice(Math.max(0, rows.length - pairs));
   const before = lifted.reduce((sum, zM) => sum + zM, 0) / Math.max(1, lifted.length);
-  const pitch = precastData.strand.pitchM[standardId];
-  const after = shape.depthM - precastData.relief.drapedTopM - ((pairs - 1) * pitch) / 2;
+  const pitch = pretensioned.strand.pitchM[standardId];
+  const after = shape.depthM - pretensioned.relief.drapedTopM - ((pairs - 1) * pitch) / 2;
   const endM = midM + (relieved / count) * (after - before);
   return { count, top, relieved, midM, endM, stress };
 }
 
 /** Most strands that may be draped or debonded, an even number. */
 export function mostRelieved(model: PrecastModel, low: number): number {
-  const { mostShare, kind } = precastData.relief;
-  const share = 2 * Math.floor((mostShare[model.standardId] * low) / 2 + 1e-9);
-  return kind[model.standardId] === 'draped' ? Math.min(share, 2 * usedRows(model, low).length) : share;
+  const kind = model.kind.relief[model.standardId];
+  const share = 2 * Math.floor((pretensioned.relief[kind].mostShare * low) / 2 + 1e-9);
+  return kind === 'draped' ? Math.min(share, 2 * usedRows(model, low).length) : share;
 }
 
 /** Heights of the rows that `count` strands fill or begin, m. */
@@ -84,10 +84,10 @@ function usedRows(model: PrecastModel, count: number): number[] {
  * where debonded in even steps, higher where draped.
  */
 export function strandsAt(model: PrecastModel, plan: StrandPlan, share: number, out: StrandsThere): void {
-  const { kind, endOver } = precastData.relief;
   const { standardId, strandM2 } = model;
-  const near = Math.min(1, Math.max(0, Math.min(share, 1 - share) / endOver[standardId]));
-  if (kind[standardId] === 'debonded') {
+  const kind = model.kind.relief[standardId];
+  const near = Math.min(1, Math.max(0, Math.min(share, 1 - share) / pretensioned.relief[kind].endOver));
+  if (kind === 'debonded') {
     const off = (1 - near) * plan.relieved;
     const low =
       (plan.count * plan.midM - (plan.count - plan.relieved) * plan.endM) / Math.max(1, plan.relieved);

@@ -1,4 +1,3 @@
-import { precastData } from './precastData.ts';
 import { elementsPerSpan, type PrecastModel } from './precastModel.ts';
 
 /** Characteristic moments of one beam at a station, kNm, and what design makes of them. */
@@ -31,13 +30,14 @@ export function beamMoments(model: PrecastModel, span: number, i: number, out: B
 }
 
 /** Diaphragms within a span. */
-export function diaphragmsWithin(spanM: number): number {
-  return Math.ceil(spanM / precastData.diaphragm.everyM - 1e-9) - 1;
+export function diaphragmsWithin({ kind }: PrecastModel, spanM: number): number {
+  const { everyM } = kind.diaphragm;
+  return everyM === undefined ? 0 : Math.ceil(spanM / everyM - 1e-9) - 1;
 }
 
 /** Moment of the diaphragms within a simple span at x, kNm. */
 function diaphragmMoment(model: PrecastModel, spanM: number, x: number): number {
-  const count = diaphragmsWithin(spanM);
+  const count = diaphragmsWithin(model, spanM);
   let moment = 0;
   for (let k = 1; k <= count; k++) {
     const a = (spanM * k) / (count + 1);

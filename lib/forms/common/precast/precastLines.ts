@@ -1,9 +1,9 @@
-import type { MeasuredLine } from '../../model/index.ts';
-import { barKg } from '../common/bars.ts';
-import { measured } from '../common/measured.ts';
-import { slabData } from '../common/slab/slabData.ts';
+import type { MeasuredLine } from '../../../model/index.ts';
+import { barKg } from '../bars.ts';
+import { measured } from '../measured.ts';
+import { slabData } from '../slab/slabData.ts';
 import { diaphragmsWithin } from './beamMoments.ts';
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
 import type { SizedBeams } from './sizeBeams.ts';
 
@@ -16,20 +16,18 @@ export interface Diaphragms {
 
 /** Concrete of one diaphragm of each kind over the width of the deck, m3. */
 export function diaphragmM3(model: PrecastModel): Diaphragms {
-  const { diaphragm } = precastData;
-  const { layout, shape } = model;
-  const between = (layout.count - 1) * (layout.spacingM - shape.webM);
-  const face = between * (shape.depthM + model.haunchM);
+  const { diaphragm, crossWalls } = model.kind;
+  const { supportM2, withinM2 } = crossWalls(model);
   return {
-    endM3: diaphragm.endM * face,
+    endM3: diaphragm.endM * supportM2,
     // Over a pier the space between the beam ends is cast as well.
-    pierM3: diaphragm.pierM * face,
-    withinM3: diaphragm.withinM * diaphragm.heightShare * shape.depthM * between,
+    pierM3: diaphragm.pierM * supportM2,
+    withinM3: diaphragm.withinM * withinM2,
   };
 }
 
-/** Measured lines of the superstructure. */
-export function precastLines(model: PrecastModel, beams: SizedBeams): MeasuredLine[] {
+/** Measured lines of the superstructure; `formworkM2` is that of the slab. */
+export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2: number): MeasuredLine[] {
   const { task, layout, shape, slab, lengthM, haunchM } = model;
   const { spansM } = task;
   const areaM2 = lengthM * task.deck.widthM;
@@ -37,7 +35,7 @@ export function precastLines(model: PrecastModel, beams: SizedBeams): MeasuredLi
   const slabM3 = slab.meanM * areaM2;
   const fillM3 = layout.count * haunchM * shape.topWidthM * lengthM;
   const one = diaphragmM3(model);
-  const within = spansM.reduce((sum, spanM) => sum + diaphragmsWithin(spanM), 0);
+  const within = spansM.reduce((sum, spanM) => sum + diaphragmsWithin(model, spanM), 0);
   const diaphragms = 2 * one.endM3 + (spansM.length - 1) * one.pierM3 + within * one.withinM3;
   const strandKg = spansM.reduce(
     (sum, spanM, i) => sum + barKg(beams.strands[i]!.plan.count * model.strandM2, spanM),
@@ -45,7 +43,8 @@ export function precastLines(model: PrecastModel, beams: SizedBeams): MeasuredLi
   );
   const linkHeightM = shape.depthM + slab.midM - 0.08;
   const linksKg = beams.shears.reduce((sum, { linksM2 }) => sum + barKg(linksM2, linkHeightM), 0);
-  const { continuity, beamBars, diaphragm } = precastData;
+  const { continuity, beamBars } = pretensioned;
+  const { diaphragm } = model.kind;
   const topKg = beams.piers.reduce(
     (sum, { topBarsM2 }, i) =>
       sum + barKg(topBarsM2, continuity.lengthOverSpan * (spansM[i]! + spansM[i + 1]!)),
@@ -107,16 +106,9 @@ export function precastLines(model: PrecastModel, beams: SizedBeams): MeasuredLi
     measured(
       'deck',
       'slab-formwork',
-      formworkM2(model),
+      formworkM2,
       'formwork of the slab',
       'soffit between top flanges, overhangs and edges',
     ),
   ];
-}
-
-/** Soffit of the slab between the top flanges and beyond them, and both edges, m2. */
-function formworkM2(model: PrecastModel): number {
-  const { task, layout, shape, slab, lengthM } = model;
-  const soffit = task.deck.widthM - layout.count * shape.topWidthM;
-  return lengthM * (Math.max(0, soffit) + 2 * slab.edgeM);
 }

@@ -1,26 +1,31 @@
 import {
   concrete,
-  girderStiffnessM4,
   loadStandard,
   materials,
   serviceTraffic,
   trafficEnvelope,
-  trafficOnGirder,
   type Concrete,
   type LoadStandard,
   type TrafficEnvelope,
   type TrafficLoad,
-} from '../../actions/index.ts';
-import { imposedCurvature, lineBeam, uniform, type Effects, type LineBeam } from '../../mechanics/index.ts';
-import type { StandardId, UnitTask } from '../../model/index.ts';
-import { supportPositions } from '../common/supports.ts';
-import type { BeamLayout } from './beamLayout.ts';
-import type { BeamChoice } from './beamChoice.ts';
+} from '../../../actions/index.ts';
+import {
+  imposedCurvature,
+  lineBeam,
+  uniform,
+  type Effects,
+  type LineBeam,
+} from '../../../mechanics/index.ts';
+import type { StandardId, UnitTask } from '../../../model/index.ts';
+import { supportPositions } from '../supports.ts';
+import type { BeamChoice, BeamLayout } from './beamChoice.ts';
+import type { BeamTraffic, PrecastKind } from './precastKind.ts';
 import { compositeBeam, type CompositeBeam } from './compositeBeam.ts';
-import { precastData } from './precastData.ts';
+import { pretensioned } from './pretensioned.ts';
 
 /** Everything about the beam that carries most, by which all beams are made. */
 export interface PrecastModel extends BeamChoice {
+  readonly kind: PrecastKind;
   readonly task: UnitTask;
   readonly standardId: StandardId;
   readonly standard: LoadStandard;
@@ -41,6 +46,7 @@ export interface PrecastModel extends BeamChoice {
   /** What curvature in plan adds to slab, superimposed load and traffic of the outer beam; 1 on a straight. */
   readonly curve: number;
   readonly traffic: TrafficLoad;
+  readonly torsion: BeamTraffic['torsion'];
   /** Beam after continuity and what acts on it, characteristic. */
   readonly beam: LineBeam;
   readonly superimposed: Effects;
@@ -66,7 +72,12 @@ export interface SimpleSpan {
 export const elementsPerSpan = 10;
 
 /** Shares the loads out to the beam that carries most (or to `girder`) and places them. */
-export function precastModel(task: UnitTask, choice: BeamChoice, girder?: number): PrecastModel {
+export function precastModel(
+  kind: PrecastKind,
+  task: UnitTask,
+  choice: BeamChoice,
+  beamIndex?: number,
+): PrecastModel {
   const { layout, shape, slab, haunchM } = choice;
   const id = task.standard;
   const standard = loadStandard(id);
@@ -79,29 +90,30 @@ export function precastModel(task: UnitTask, choice: BeamChoice, girder?: number
   const inner = layout.spacingM * slab.midM;
   const outer = (layout.spacingM / 2) * slab.midM + (layout.overhangM * (slab.rootM + slab.edgeM)) / 2;
   const wetM2 = Math.max(inner, outer) + haunchM * shape.topWidthM;
-  const { withinM, heightShare } = precastData.diaphragm;
-  const diaphragmKN = gamma * withinM * heightShare * shape.depthM * (layout.spacingM - shape.webM);
+  const diaphragmKN = gamma * kind.diaphragm.withinM * kind.crossWalls(choice).ofBeamM2;
   const curve = chordFactor(task, layout);
-  const traffic = amplified(worstTraffic(task, choice, composite, 1 / composite.slabRatio, girder), curve);
+  const carried = kind.traffic(task, choice, composite, 1 / composite.slabRatio, beamIndex);
+  const traffic = amplified(carried.load, curve);
   const eiKNm2 = beamConcrete.ecmMPa * 1e3 * composite.inertiaM4;
   const beam = lineBeam({ spansM: task.spansM, stationsPerSpan: elementsPerSpan, eiKNm2: () => eiKNm2 });
   const superimposedKNm = (curve * task.deck.superimposedKNm) / layout.count;
   const most = trafficEnvelope(beam, traffic, { deflection: false });
   const heightM = shape.depthM + haunchM + slab.rootM;
   // A warm top is longer and lifts the middle: negative where sagging is positive.
-  const perKelvin = -precastData.temperature.expansion1PerK / heightM;
+  const perKelvin = -pretensioned.temperature.expansion1PerK / heightM;
   return {
     ...choice,
+    kind,
     task,
     standardId: id,
     standard,
     supportsM,
     lengthM: supportsM[supportsM.length - 1]!,
     beamConcrete,
-    releaseConcrete: concrete(id, precastData.release.strength[id] * strengths.girder),
+    releaseConcrete: concrete(id, pretensioned.release.strength[id] * strengths.girder),
     slabConcrete,
-    strandM2: precastData.strand.areaMm2[id] / 1e6,
-    jackMPa: precastData.strand.jacking[id] * materials.strand[id].ultimateMPa,
+    strandM2: pretensioned.strand.areaMm2[id] / 1e6,
+    jackMPa: pretensioned.strand.jacking[id] * materials.strand[id].ultimateMPa,
     composite,
     ownKNm: gamma * shape.areaM2,
     wetKNm: curve * gamma * wetM2,
@@ -109,6 +121,7 @@ export function precastModel(task: UnitTask, choice: BeamChoice, girder?: number
     diaphragmKN,
     curve,
     traffic,
+    torsion: carried.torsion,
     beam,
     superimposed: uniform(beam, superimposedKNm),
     most,
@@ -178,41 +191,4 @@ function serviceEnvelope(
     shearMaxKN: scaled(most.shearMaxKN),
     shearMinKN: scaled(most.shearMinKN),
   };
-}
-
-/** The beam that carries most; all beams are made like it. */
-function worstTraffic(
-  task: UnitTask,
-  { layout, shape, haunchM }: BeamChoice,
-  composite: CompositeBeam,
-  modularRatio: number,
-  girder?: number,
-): TrafficLoad {
-  const armM = shape.depthM - shape.centroidM + haunchM + composite.slabM / 2;
-  const spanM = Math.max(...task.spansM);
-  const options = {
-    spanM,
-    slabM: composite.slabM,
-    kgM4: girderStiffnessM4(modularRatio, shape.inertiaM4, shape.areaM2, armM),
-  };
-  if (girder !== undefined)
-    return trafficOnGirder(task.standard, task.deck, layout.offsetsM, girder, options);
-  // On a symmetrical deck the outer beam and its neighbour tell all; the middle is never worse.
-  const left = layout.offsetsM.slice(0, 2).map((_, i) => i);
-  const lines = task.deck.carriagewayOffsetM === 0 ? left : [...left, layout.count - 2, layout.count - 1];
-  const loads = [...new Set(lines)].map((i) =>
-    trafficOnGirder(task.standard, task.deck, layout.offsetsM, i, options),
-  );
-  const perVehicle = (2 * heaviestVehicleKN(loadStandard(task.standard))) / spanM;
-  const weigh = (load: TrafficLoad): number =>
-    load.vehicleFactor * perVehicle + load.udlKNm + load.footwayKNm;
-  return loads.reduce((worst, next) => (weigh(next) > weigh(worst) ? next : worst));
-}
-
-/** Weight of the heaviest vehicle of a standard with dynamic allowance, kN. */
-export function heaviestVehicleKN(standard: LoadStandard): number {
-  const weights = standard.vehicles.map((vehicle) =>
-    vehicle.axles.reduce((sum, axle) => sum + axle.loadKN, 0),
-  );
-  return Math.max(...weights) * (1 + standard.dynamicAllowance);
 }
