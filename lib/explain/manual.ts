@@ -12,7 +12,7 @@ import { compositeFigures } from '../forms/composite-i/figures.ts';
 import { boxFigures } from '../forms/concrete-box/figures.ts';
 import { designFigures } from '../forms/figures.ts';
 import { floorPractice } from '../forms/floor/floorFigures.ts';
-import { precastManual } from '../forms/precast-i/figures.ts';
+import { precastIFigures } from '../forms/precast-i/figures.ts';
 import { slabBridgeFigures } from '../forms/slab/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
@@ -45,7 +45,7 @@ export const manual: readonly Descriptor[] = [
   ...compositeFigures,
   ...compositeBoxFigures,
   ...boxFigures,
-  ...precastManual,
+  ...precastIFigures,
   ...trussFigures,
   ...cableFigures,
   ...floorPractice,
