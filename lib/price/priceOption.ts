@@ -68,17 +68,17 @@ export function priceOption(
     }
   }
   if (privateError !== null) {
-    for (const P of parts.values()) for (let k = 0; k < n; k++) P[k] = P[k]! * privateError[k]!;
+    for (const P of parts.values()) multiply(P, privateError);
   }
   const totals = new Float64Array(n);
   for (const part of billParts) {
     const P = parts.get(part);
-    if (P !== undefined) for (let k = 0; k < n; k++) totals[k] = totals[k]! + P[k]!;
+    if (P !== undefined) addTimes(totals, 1, P);
   }
   const [p10, q1, p50, q3, p90] = quantilesOf(totals, [0.1, 0.25, 0.5, 0.75, 0.9]) as Quantiles;
   const approaches = parts.get('approaches');
   const without = Float64Array.from(totals);
-  if (approaches !== undefined) for (let k = 0; k < n; k++) without[k] = without[k]! - approaches[k]!;
+  if (approaches !== undefined) addTimes(without, -1, approaches);
   return {
     totals,
     cost: { p10, p50, p90 },
@@ -99,6 +99,11 @@ function addTimes(T: Float64Array, quantity: number, R: Float64Array): void {
 /** T + A B in each draw. */
 function addProduct(T: Float64Array, A: Float64Array, B: Float64Array): void {
   for (let k = 0; k < T.length; k++) T[k] = T[k]! + A[k]! * B[k]!;
+}
+
+/** T times A in each draw. */
+function multiply(T: Float64Array, A: Float64Array): void {
+  for (let k = 0; k < T.length; k++) T[k] = T[k]! * A[k]!;
 }
 
 /** T + quantity R in each draw, the quantity being that of the class drawn. */

@@ -107,10 +107,13 @@ async function drag(page: Page, name: string, station: string): Promise<Drag & {
   await page.evaluate((at) => (window as unknown as Watched).watched.start(at), station);
   const before = await busy();
   const start = Date.now();
+  const moves: Promise<void>[] = [];
   for (let step = 1; Date.now() - start < 2000; step += 1) {
-    // Slowly out to 60 px and back: every move is a new value.
-    await page.mouse.move(x + 30 * (1 - Math.cos(step / 15)) + (step % 2), y);
+    // Out to 60 px and back, as a mouse would tell it: every 8 ms, whether or not the page has kept up.
+    moves.push(page.mouse.move(x + 30 * (1 - Math.cos(step / 15)) + (step % 2), y));
+    await new Promise((resolve) => setTimeout(resolve, 8));
   }
+  await Promise.all(moves);
   const busyMs = (await busy()) - before;
   await page.mouse.move(x + 40, y);
   await page.evaluate(() => (window as unknown as Watched).watched.release());

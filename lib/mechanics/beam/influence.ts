@@ -69,7 +69,20 @@ export function sources(beam: LineBeam): readonly number[] {
 
 /** Moment at a station, kNm, of a unit load (1 kN) at every station. */
 export function momentInfluence(beam: LineBeam, station: number): Float64Array {
-  return atStations(momentLine(beam, checked(beam, station)));
+  const { xM, startMomentLine } = beam;
+  const x = xM[checked(beam, station)]!;
+  const values = startMomentLine ? atStations(startMomentLine) : new Float64Array(xM.length);
+  const last = xM.length - 1;
+  // As in `momentLine`, at the stations alone.
+  sources(beam).forEach((at, j) => {
+    if (at >= station) return;
+    const arm = x - xM[at]!;
+    const line = beam.reactionLines[j]!;
+    for (let e = 0; e < last; e++) values[e] = values[e]! + arm * line[4 * e]!;
+    values[last] = values[last]! + arm * line[4 * last - 2]!;
+  });
+  for (let e = 0; e < station; e++) values[e] = values[e]! - (x - xM[e]!);
+  return values;
 }
 
 /** Shear just left or right of a station, kN, of a unit load at every station (a load on the station itself stands right of it). */

@@ -50,8 +50,8 @@ function sumPlacings(
   const { entry, weight, positive, negative } = placings;
   let at = from * axles;
   for (let k = from; k < to; k++) {
+    let all = 0;
     let adds = 0;
-    let takes = 0;
     for (let i = 0; i < axles; i++, at++) {
       const e = entry[at]!;
       const w = 4 * at;
@@ -60,11 +60,11 @@ function sumPlacings(
         weight[w + 1]! * line[e + 1]! +
         weight[w + 2]! * line[e + 2]! +
         weight[w + 3]! * line[e + 3]!;
-      if (whole || value > 0) adds += value;
-      else takes += value;
+      all += value;
+      adds += Math.max(0, value);
     }
-    positive[k] = adds;
-    negative[k] = whole ? adds : takes;
+    positive[k] = whole ? all : adds;
+    negative[k] = whole ? all : all - adds;
   }
 }
 

@@ -1,20 +1,13 @@
 import type { LineBeam } from '../beam/lineBeam.ts';
 import { loadTrack, type Track } from './track.ts';
 
-const tracks = new WeakMap<Float64Array, Track>();
-
-/** The track along a beam; kept with its stations, so that beams of equal geometry share placings. */
+/** The track along a beam: beams of equal geometry have the same stations and share its placings. */
 export function beamTrack(beam: LineBeam): Track {
-  let track = tracks.get(beam.xM);
-  if (!track) {
-    const { left, right } = beam.freedoms;
-    track = loadTrack(
-      beam.xM,
-      left.some((freedom, i) => freedom !== right[i]),
-    );
-    tracks.set(beam.xM, track);
-  }
-  return track;
+  const { left, right } = beam.freedoms;
+  return loadTrack(
+    beam.xM,
+    left.some((freedom, i) => freedom !== right[i]),
+  );
 }
 
 /** Element line of ordinates that run straight between stations. */

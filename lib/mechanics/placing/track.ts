@@ -37,14 +37,28 @@ export interface Placings {
   readonly negative: Float64Array;
 }
 
-/** @throws RangeError when stations do not rise. */
+const kept = {
+  kinked: new WeakMap<ArrayLike<number>, Track>(),
+  smooth: new WeakMap<ArrayLike<number>, Track>(),
+};
+
+/**
+ * The track along stations, which must not change afterwards: it is kept with them, so that lines on the same stations share
+ * placings.
+ * @throws RangeError when stations do not rise
+ */
 export function loadTrack(xM: ArrayLike<number>, kinked = true): Track {
+  const tracks = kinked ? kept.kinked : kept.smooth;
+  const known = tracks.get(xM);
+  if (known) return known;
   for (let i = 1; i < xM.length; i++) {
     if (!(xM[i]! > xM[i - 1]!))
       throw new RangeError(`xM[${i}]: expected more than ${xM[i - 1]}, received ${xM[i]}`);
   }
   if (!(xM.length >= 2)) throw new RangeError(`xM: expected two stations or more, received ${xM.length}`);
-  return { xM, kinked, placings: new Map() };
+  const made: Track = { xM, kinked, placings: new Map() };
+  tracks.set(xM, made);
+  return made;
 }
 
 /** The group running the other way. */
