@@ -35,7 +35,7 @@ const PIER_SPAN_M = 40;
 
 /**
  * What the search knows of cost, made by the real sizing, take-off and mean rates: deck cost and depth of each form
- * at ten spans of its possible band, supports by what they meet at their chainage.
+ * at a few spans of its possible band, supports by what they meet at their chainage.
  */
 export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>): TableShelf {
   const { site, costOf } = makers;
@@ -89,7 +89,9 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
       const [i, share] = between(rows.spansM, spanM);
       const low = share < 1 ? value(rows.row(i)) : 0;
       const high = share > 0 ? value(rows.row(i + 1)) : 0;
-      return (1 - share) * low + share * high;
+      if (!(share > 0 && share < 1 && low > 0 && high > 0)) return (1 - share) * low + share * high;
+      const octaves = Math.log(spanM / rows.spansM[i]!) / Math.log(rows.spansM[i + 1]! / rows.spansM[i]!);
+      return low * Math.pow(high / low, octaves);
     };
     return {
       deckPerM(form, spanM, governingM) {

@@ -10,60 +10,111 @@ export interface DepthTrial {
 
 /** Cost within this share of the least counts as the least: the curve is flat and the choice must not jitter. */
 const FLAT = 0.01;
+/** Of a band of depths, where the search begins when nothing better is known. */
+const FIRST_LOOK = 0.4;
+/** From one trial to the next the depth grows by this factor. */
+const STRIDE = 1.22;
 /** Depths closer than this share of themselves cost so nearly the same that nothing is tried between them. */
 const FINE = 0.08;
 /** Depths are drawn to 50 mm: 20 steps to the metre. */
 const STEPS = 20;
 
+type Tried = readonly [on: number, trial: DepthTrial];
+
+const holds = ([, { utilisation }]: Tried): boolean => utilisation <= 1;
+
+/** Cost against the logarithm of depth through three trials. */
+function parabola(three: readonly [Tried, Tried, Tried]): { at: (on: number) => number; least: number } {
+  const [x0, x1, x2] = three.map(([on]) => Math.log(on)) as [number, number, number];
+  const [y0, y1, y2] = three.map(([, { cost }]) => cost) as [number, number, number];
+  const rise = (y1 - y0) / (x1 - x0);
+  const bend = ((y2 - y1) / (x2 - x1) - rise) / (x2 - x0);
+  const at = (on: number): number => {
+    const x = Math.log(on);
+    return y0 + (x - x0) * (rise + bend * (x - x1));
+  };
+  const vertex = (x0 + x1) / 2 - rise / (2 * bend);
+  const inside = bend > 0 && vertex > x0 && vertex < x2;
+  return { at, least: Math.min(y0, y1, y2, inside ? at(Math.exp(vertex)) : Infinity) };
+}
+
 /**
  * The shallowest depth, m, within 1 % of the least cost between two depths, on a grid of 50 mm.
  * Depths whose checks hold come first; where none holds the one with the lowest utilisation is returned.
  *
- * The band is tried at `trials` depths and once more between the neighbours of the best; costs between trials are read
- * off straight lines. The work pauses after each trial.
+ * Walks from a depth near which the least is looked for, shallower and deeper, until it has left it behind on both sides;
+ * between three trials that hold the cost is a parabola. The work pauses after each trial.
  *
  * @param range least and most depth, m, least > 0
  * @param tryAt cost and utilisation at one depth, m
+ * @param near depth to begin with, m; held in the range
  */
 export function* leastCostDepth(
   range: readonly [least: number, most: number],
   tryAt: (depthM: number) => DepthTrial,
-  trials: number,
+  near = range[0] + FIRST_LOOK * (range[1] - range[0]),
 ): Work<number> {
   const least = Math.ceil(range[0] * STEPS - 1e-9);
   const most = Math.max(least, Math.floor(range[1] * STEPS + 1e-9));
+  const kept = (step: number): number => Math.min(most, Math.max(least, Math.round(step)));
   const tried = new Map<number, DepthTrial>();
-  const visit = function* (step: number): Work<void> {
-    const on = Math.round(step);
+  const visit = function* (on: number): Work<void> {
     if (tried.has(on)) return;
     tried.set(on, tryAt(on / STEPS));
     yield;
   };
-  const count = Math.max(2, Math.min(trials, most - least + 1));
-  for (let i = 0; i < count; i++) yield* visit(least + ((most - least) * i) / (count - 1));
-
-  const sorted = (): [on: number, trial: DepthTrial][] => [...tried].sort((a, b) => a[0] - b[0]);
-  const holding = (): [on: number, trial: DepthTrial][] => sorted().filter(([, t]) => t.utilisation <= 1);
-  const cheapest = (rows: readonly [number, DepthTrial][]) =>
+  const sorted = (): Tried[] => [...tried].sort((a, b) => a[0] - b[0]);
+  const cheapest = (rows: readonly Tried[]): Tried =>
     rows.reduce((best, row) => (row[1].cost < best[1].cost ? row : best));
+  const flat = (rows: readonly Tried[]): number => (1 + FLAT) * cheapest(rows)[1].cost;
 
-  if (holding().length === 0) {
+  const start = kept(near * STEPS);
+  yield* visit(start);
+  yield* visit(kept(Math.min(start - 1, start / STRIDE)));
+  yield* visit(kept(Math.max(start + 1, start * STRIDE)));
+  for (;;) {
+    const rows = sorted();
+    const holding = rows.filter(holds);
+    const first = rows[0]!;
+    const last = rows.at(-1)!;
+    // Nothing holds: deeper is stronger, until it is not.
+    const weak = holding.length === 0;
+    const deeper = weak ? last[1].utilisation <= first[1].utilisation : cheapest(holding) === last;
+    const shallower = weak ? !deeper : holds(first) && first[1].cost <= flat(holding);
+    const next =
+      deeper && last[0] < most
+        ? Math.max(last[0] + 1, last[0] * STRIDE)
+        : shallower && first[0] > least
+          ? Math.min(first[0] - 1, first[0] / STRIDE)
+          : undefined;
+    if (next === undefined) break;
+    yield* visit(kept(next));
+  }
+
+  const holding = sorted().filter(holds);
+  if (holding.length === 0) {
     return sorted().reduce((best, row) => (row[1].utilisation < best[1].utilisation ? row : best))[0] / STEPS;
   }
+  // Where the depth beside the best no longer holds, the limit between them is looked for once.
   const rows = sorted();
-  const at = rows.findIndex(([on]) => on === cheapest(holding())[0]);
-  const best = rows[at]![0];
-  for (const beside of [rows[at - 1], rows[at + 1]]) {
-    if (beside && Math.abs(beside[0] - best) > FINE * best) yield* visit((best + beside[0]) / 2);
-  }
+  const best = cheapest(holding)[0];
+  const weaker = rows[rows.findIndex(([on]) => on === best) - 1];
+  if (weaker && !holds(weaker) && best - weaker[0] > FINE * best)
+    yield* visit(Math.round((best + weaker[0]) / 2));
 
-  const final = holding();
-  const limit = (1 + FLAT) * cheapest(final)[1].cost;
-  const first = final.findIndex(([, t]) => t.cost <= limit);
-  const inside = final[first]!;
-  const outside = final[first - 1];
+  const final = sorted().filter(holds);
+  const at = final.findIndex(([, { cost }]) => cost <= flat(final));
+  const inside = final[at]!;
+  const outside = final[at - 1];
   if (!outside) return inside[0] / STEPS;
-  // Between a depth that is too dear and one that is not: where the straight line meets the limit.
-  const share = (outside[1].cost - limit) / (outside[1].cost - inside[1].cost);
-  return Math.ceil(outside[0] + share * (inside[0] - outside[0]) - 1e-9) / STEPS;
+  // Between a depth that is too dear and one that is not: the first on the grid where the curve is within the limit.
+  const beyond = final[at + 1];
+  const curve = beyond ? parabola([outside, inside, beyond]) : undefined;
+  const limit = Math.min(flat(final), (1 + FLAT) * (curve?.least ?? Infinity));
+  const line = (on: number): number =>
+    outside[1].cost + ((inside[1].cost - outside[1].cost) * (on - outside[0])) / (inside[0] - outside[0]);
+  for (let on = outside[0] + 1; on < inside[0]; on += 1) {
+    if ((curve?.at ?? line)(on) <= limit) return on / STEPS;
+  }
+  return inside[0] / STEPS;
 }

@@ -12,6 +12,8 @@ import { kept, remembered, type Kept } from '../kept.ts';
 /** A trial unit of one governing span at its depth of least cost. */
 export interface TrialRow {
   readonly depthM: number;
+  /** Most depth of the band of its span, m. */
+  readonly mostDepthM: number;
   /** Money per m of deck, by the share of the governing span that a span is of. */
   readonly perM: readonly number[];
   /** Money that does not grow with the deck, by number of pylons. */

@@ -10,12 +10,10 @@ import type { TrialRow } from './memory.ts';
 import type { Sizer } from './sizer.ts';
 import { finish, type Work } from './work.ts';
 
-/** Governing spans at which each form is really sized; in between the table is read off straight lines. */
-const TABLE_SPANS = 10;
+/** Governing spans at which each form is really sized; in between cost grows with a power of the span. */
+const TABLE_SPANS = 7;
 /** Shares of the governing span at which the shorter spans of a unit are sized with the depth of the longest. */
 export const SHARES = [0.5, 1] as const;
-/** Depths tried for each row before the two beside the best. */
-const TABLE_TRIALS = 3;
 /** Spans under this are culverts, m. */
 const LEAST_SPAN_M = 8;
 /** End over interior span of a trial unit: inside every published window. */
@@ -110,15 +108,19 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     };
   };
 
-  const made = function* (spanM: number): Work<TrialRow> {
-    const { spansM: trialSpans } = trialUnit(form, spanM, 1);
+  const made = function* (index: number): Work<TrialRow> {
+    const spanM = spansM[index]!;
+    const range = depthRange(form, method, trialUnit(form, spanM, 1).spansM, site.deck);
+    // The best depth is nearly the same share of the band for one span as for the one before it.
+    const before = index > 0 ? yield* make(index - 1) : undefined;
+    const look = before && (before.depthM * range[1]) / before.mostDepthM;
     const depthM = yield* leastCostDepth(
-      depthRange(form, method, trialSpans, site.deck),
+      range,
       (trialM) => {
         const { design, perM } = sized(spanM, trialM, 1);
         return { cost: perM, utilisation: design.limitingCheck.utilisation };
       },
-      TABLE_TRIALS,
+      look,
     );
     const whole = sized(spanM, depthM, 1);
     yield;
@@ -129,13 +131,13 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     yield;
     const fixed = hung ? [whole.fixed, whole.fixed, sized(spanM, depthM, 2).fixed] : [whole.fixed];
     const { permanentKNm, trafficKNm } = deckOnSupport(whole.design);
-    return { depthM, perM, fixed, loadKNm: permanentKNm + trafficKNm };
+    return { depthM, mostDepthM: range[1], perM, fixed, loadKNm: permanentKNm + trafficKNm };
   };
 
   const key = (index: number): string => JSON.stringify([base, spansM[index], booksKey]);
   const known: (TrialRow | undefined)[] = spansM.map((_, index) => rows.get(key(index)));
   const make = function* (index: number): Work<TrialRow> {
-    return (known[index] ??= rows.put(key(index), yield* made(spansM[index]!)));
+    return (known[index] ??= rows.put(key(index), yield* made(index)));
   };
   return { spansM, row: (index) => known[index] ?? finish(make(index)), make, key };
 }

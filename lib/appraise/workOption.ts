@@ -129,8 +129,6 @@ function atDepths(bench: Workbench, option: Option, depthsM: readonly number[]):
   return remembered(bench.keptHere.atDepth, keyOf(option, depthsM), () => workAt(bench, option, depthsM));
 }
 
-/** Depths tried before the two beside the best. */
-const TRIALS = 4;
 /** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
 const OVER_DECK_ALONE = 1.15;
 
@@ -169,7 +167,7 @@ function* bestDepth(bench: Workbench, option: Option, main: Unit): Work<number> 
         utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation,
       };
     },
-    TRIALS,
+    bench.tables.tableFor(option).depthM(main.form, Math.max(...spansOf(main))),
   );
 }
 

@@ -12,8 +12,6 @@ import { rounded } from './rounded.ts';
 
 const flagNames = ['form', 'spans', 'width', 'lanes', 'depth', 'carriageway', 'radius', 'loading', 'girders'];
 const SURFACING_M = 0.09;
-/** Depths tried before the two beside the best. */
-const TRIALS = 5;
 /** Barriers take what the carriageway leaves of the width, half on each side. */
 const BARRIERS_M = 1;
 
@@ -146,15 +144,11 @@ const mean = meanRates(ratesFor({ ratePack: 'demo-2026', rates: [] }));
 const depthM =
   asked ??
   finish(
-    leastCostDepth(
-      depthRange(task.form, task.method, task.spansM, task.deck),
-      (trialM) => {
-        const { lines, limitingCheck } = module.size({ ...task, depthM: trialM });
-        const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
-        return { cost, utilisation: limitingCheck.utilisation };
-      },
-      TRIALS,
-    ),
+    leastCostDepth(depthRange(task.form, task.method, task.spansM, task.deck), (trialM) => {
+      const { lines, limitingCheck } = module.size({ ...task, depthM: trialM });
+      const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
+      return { cost, utilisation: limitingCheck.utilisation };
+    }),
   );
 const design = module.size({ ...task, depthM });
 const { superstructure, supports } = splitQuantities(design.lines);
