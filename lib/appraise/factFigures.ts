@@ -184,7 +184,9 @@ export const factFigures: readonly Descriptor[] = [
   asIs('headroomSpareM', (at) => ({
     spare: `${at.root}/headroom${at.option.headroom === null ? '' : '/spareM'}`,
   })),
-  ...(['trussHeightM', 'pylonHeightM', 'boxInnerHeightM'] as const).map((id) => asIs(id, designFigure(id))),
+  ...(['trussHeightM', 'edgeGirderM', 'pylonHeightM', 'boxInnerHeightM'] as const).map((id) =>
+    asIs(id, designFigure(id)),
+  ),
   {
     ...fact(
       'pylonHeightRatio',

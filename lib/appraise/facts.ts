@@ -122,7 +122,7 @@ export function optionFacts(
     maxGradient: site.road.maxGradient,
   };
   if (headroom) known['headroomSpareM'] = headroom.spareM;
-  for (const id of ['trussHeightM', 'pylonHeightM', 'boxInnerHeightM'] as const) {
+  for (const id of ['trussHeightM', 'edgeGirderM', 'pylonHeightM', 'boxInnerHeightM'] as const) {
     if (figures[id] !== undefined) known[id] = figures[id];
   }
   // One pylon holds a main span from one end: as tall as one of two pylons of a span twice as long.

@@ -13,6 +13,7 @@ import { boxFigures } from '../forms/concrete-box/figures.ts';
 import { designFigures } from '../forms/figures.ts';
 import { floorPractice } from '../forms/floor/floorFigures.ts';
 import { precastIFigures } from '../forms/precast-i/figures.ts';
+import { halfThroughFigures } from '../forms/half-through/figures.ts';
 import { slabBridgeFigures } from '../forms/slab/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
@@ -46,6 +47,7 @@ export const manual: readonly Descriptor[] = [
   ...compositeBoxFigures,
   ...boxFigures,
   ...precastIFigures,
+  ...halfThroughFigures,
   ...trussFigures,
   ...cableFigures,
   ...floorPractice,

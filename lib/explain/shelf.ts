@@ -9,6 +9,7 @@ import precastI from '../../data/forms/precast-i.json';
 import pretensioned from '../../data/forms/pretensioned.json';
 import slab from '../../data/forms/slab.json';
 import slabDeck from '../../data/forms/slab-deck.json';
+import halfThrough from '../../data/forms/half-through.json';
 import truss from '../../data/forms/truss.json';
 import ground from '../../data/ground.json';
 import materials from '../../data/materials.json';
@@ -39,6 +40,7 @@ const files: Readonly<Record<string, unknown>> = {
   'concrete-box': concreteBox,
   'precast-i': precastI,
   pretensioned,
+  'half-through': halfThrough,
   truss,
   'cable-stayed': cableStayed,
 };

@@ -6,6 +6,7 @@ import { compositeI } from './composite-i/index.ts';
 import { concreteBox } from './concrete-box/index.ts';
 import type { FormModule } from './formModule.ts';
 import { slab } from './slab/index.ts';
+import { halfThrough } from './half-through/index.ts';
 import { precastI } from './precast-i/index.ts';
 import { truss } from './truss/index.ts';
 
@@ -15,6 +16,7 @@ export type { FormModule, Pattern } from './formModule.ts';
 export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   slab,
   'precast-i': precastI,
+  'half-through': halfThrough,
   'composite-i': compositeI,
   'composite-box': compositeBox,
   'concrete-box': concreteBox,

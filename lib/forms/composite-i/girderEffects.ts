@@ -7,6 +7,7 @@ import {
   type Effects,
   type LineBeam,
 } from '../../mechanics/index.ts';
+import { steppedStiffness } from '../common/steppedStiffness.ts';
 import { compositeData } from './compositeData.ts';
 import { girderFigures, steelArea, type GirderFigures, type GirderTop } from './girderSection.ts';
 import type { GirderModel } from './girderModel.ts';
@@ -80,22 +81,9 @@ function stageBeam(model: GirderModel, run: PlateRun, tops: readonly GirderTop[]
     const top = tops ? (model.isCracked[e] === 1 ? model.cracked[e]! : tops[e]!) : undefined;
     return model.modulusKNm2 * girderFigures(figures, platesAt(run, e), top).inertiaM4;
   });
-  // The beam asks from left to right; a moving index finds the element.
-  let e = 0;
-  let endM = model.elementM[0]!;
-  let atM = 0;
-  const eiKNm2 = (xM: number): number => {
-    if (xM < atM) {
-      e = 0;
-      endM = model.elementM[0]!;
-    }
-    atM = xM;
-    while (xM > endM && e < ei.length - 1) endM += model.elementM[++e]!;
-    return ei[e]!;
-  };
   return lineBeam({
     spansM: model.task.spansM,
-    eiKNm2,
+    eiKNm2: steppedStiffness(model.elementM, ei),
     stationsPerSpan: ei.length / model.task.spansM.length,
   });
 }

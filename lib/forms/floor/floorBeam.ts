@@ -38,6 +38,11 @@ export interface FloorBeam {
   /** Painted surface, m2/m. */
   readonly paintM2PerM: number;
   readonly utilisation: number;
+  /** Inertia with the slab, short loads, and of the steel alone, m4. */
+  readonly shortInertiaM4: number;
+  readonly steelInertiaM4: number;
+  /** Traffic moment it was asked to carry, characteristic, kNm. */
+  readonly trafficCharacteristicKNm: number;
   readonly governs: 'casting' | 'bottom flange' | 'fatigue' | 'deflection' | 'shear' | 'minimum';
 }
 
@@ -146,6 +151,9 @@ export function floorBeam(
     massKgPerM: steelArea(plates) * density * (1 + d.detailShare.value),
     paintM2PerM: 2 * h + 2 * plates.bottomWidthM + plates.topWidthM,
     utilisation: worst[1],
+    shortInertiaM4: stage(plates, short).i,
+    steelInertiaM4: stage(plates, bareGirder).i,
+    trafficCharacteristicKNm: demand.trafficCharacteristicKNm,
     governs: worst[0],
   };
 }

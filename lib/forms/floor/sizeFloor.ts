@@ -32,6 +32,8 @@ export interface FloorCase {
   readonly depthM: number;
   /** True: stringers carry a slab that spans across the road. False: the slab spans from cross-girder to cross-girder. */
   readonly stringers: boolean;
+  /** Design moment that frames of cross-girders and posts put into the cross-girders, kNm; 0 when absent. */
+  readonly frameKNm?: number;
 }
 
 export interface Floor {
@@ -211,13 +213,13 @@ function sizeCross(
         castingKNm: uls.permanent * casting,
         slabKNm: uls.permanent * dead,
         superimposedKNm: uls.superimposed * superimposedMoment,
-        trafficKNm: uls.traffic * traffic,
+        trafficKNm: uls.traffic * traffic + (floor.frameKNm ?? 0),
         shearKN:
           (uls.permanent * (overDeck + ownKNm * b) + uls.superimposed * on.totalKNm * p) / 2 +
           uls.traffic * shear,
         fatigueKNm: fatigue,
         trafficCharacteristicKNm: traffic,
-        // Stringers come in at stiffeners.
+        // Stringers or posts come in at stiffeners.
         detail: 'stiffener',
       },
       id,
