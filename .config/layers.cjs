@@ -2,6 +2,7 @@
 const stages = [
   'study',
   'site',
+  'river',
   'arrange',
   'forms',
   'substructure',

@@ -6,6 +6,7 @@ import { perM2, splitQuantities } from '../takeoff/index.ts';
 import type { Drawn } from './drawn.ts';
 import { optionFacts } from './facts.ts';
 import { remembered } from '../kept.ts';
+import { riversCrossed } from './riversCrossed.ts';
 import type { Work } from './work.ts';
 import { mainUnit, spareOf, workOption, workOptionAt, type Worked } from './workOption.ts';
 import type { Workbench } from './workbench.ts';
@@ -70,6 +71,7 @@ function judged(
       perM2: perM2(superstructure, deckAreaM2),
       supportQuantities: supports,
       headroom,
+      rivers: riversCrossed(site, worked),
       deckAreaM2,
       cost: priced.cost,
       quartiles: priced.quartiles,

@@ -1,6 +1,7 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { factDictionary } from '../rules/index.ts';
 import { asIs, fact, factOf, factsOf } from './factFigure.ts';
+import { riverFactFigures } from './riverFactFigures.ts';
 import { supportFactFigures } from './supportFactFigures.ts';
 import { mainUnit, spansOf } from './workOption.ts';
 
@@ -160,6 +161,7 @@ export const factFigures: readonly Descriptor[] = [
     ({ pieces: all }) => Math.max(0, ...all),
   ),
   ...supportFactFigures,
+  ...riverFactFigures,
   asIs('haulLengthM', () => ({ given: 'brief/access/haulLengthM' })),
   asIs('haulMassT', () => ({ given: 'brief/access/haulMassT' })),
   {

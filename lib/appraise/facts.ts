@@ -2,6 +2,7 @@ import type { AppraisedOption, Facts, Option, Site, Study, Unit, WorkedOption } 
 import { roadLevelAt, constructionDepth, groundAt, waterDepthAt } from '../site/index.ts';
 import { quantitiesOf } from '../takeoff/index.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
+import { riverFacts } from './riverFacts.ts';
 import { supportFacts } from './supportFacts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
 
@@ -103,6 +104,7 @@ export function optionFacts(
   const known: Known = {
     ...arrangementFacts(site, option),
     ...supportFacts(option),
+    ...riverFacts(site, option),
     falseworkHeightM: option.method === 'falsework' ? falseworkHeightM(site, option, main) : 0,
     haunched: design.depthM.support !== design.depthM.midspan,
     prestressed: quantitiesOf(design.lines).prestressKg > 0,

@@ -19,6 +19,7 @@ import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
 import { priceFigures } from '../price/figures.ts';
 import { programmeFigures } from '../programme/figures.ts';
+import { riverFigures } from '../river/figures.ts';
 import { windowFigures } from '../rules/figures.ts';
 import { deckFigures } from '../site/deckFigures.ts';
 import { siteFigures } from '../site/figures.ts';
@@ -55,6 +56,7 @@ export const manual: readonly Descriptor[] = [
   ...roadFigures,
   ...headroomFigures,
   ...placeFigures,
+  ...riverFigures,
   ...supportFigures,
   ...articulationFigures,
   ...shaftFigures,

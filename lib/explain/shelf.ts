@@ -17,6 +17,7 @@ import programme from '../../data/programme.json';
 import drivers from '../../data/rates/drivers.json';
 import hl93 from '../../data/standards/hl93.json';
 import lm1 from '../../data/standards/lm1.json';
+import river from '../../data/river.json';
 import substructure from '../../data/substructure.json';
 import type { FigureValue } from '../model/index.ts';
 import { fieldWords } from './fieldWords.ts';
@@ -24,6 +25,7 @@ import { fieldWords } from './fieldWords.ts';
 /** Data files by the step after `data`; the files of forms and standards by their own names. */
 const files: Readonly<Record<string, unknown>> = {
   substructure,
+  river,
   programme,
   drivers,
   ground,

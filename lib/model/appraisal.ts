@@ -84,6 +84,33 @@ export interface Foundation {
   readonly lines: readonly MeasuredLine[];
 }
 
+/** What an option does to one water in its design flood, square to the flow; null where flow or flood level is unknown. */
+export interface RiverCheck {
+  /** Index among the waters of the site. */
+  readonly water: number;
+  readonly flowM3s: number | null;
+  /** Mean velocity before the bridge stands, m/s. */
+  readonly velocityMs: number | null;
+  /** Area under the flood level: of the river, between the abutments, and that less the piers, m2. */
+  readonly areaM2: number | null;
+  readonly bridgeAreaM2: number | null;
+  readonly openingM2: number | null;
+  readonly affluxM: number | null;
+  readonly allowedAffluxM: number | null;
+  /** Width of the opening less the piers, and the width the river makes for itself in alluvium, m. */
+  readonly waterwayM: number | null;
+  readonly regimeWidthM: number | null;
+  /** Flow as given and by velocity x area, greater over smaller. */
+  readonly flowSpread: number | null;
+}
+
+/** A water as an option crosses it. */
+export interface RiverCrossed extends RiverCheck {
+  /** Least height of the soffit over the flood with its afflux, m, and what it should be. */
+  readonly freeboardM: number | null;
+  readonly freeboardNeededM: number;
+}
+
 /** Everything worked out for one option before prices are drawn. */
 export interface WorkedOption {
   readonly number: number;
@@ -113,6 +140,8 @@ export interface AppraisedOption extends WorkedOption {
   readonly supportQuantities: Quantities;
   /** Least spare headroom, m, and what it is measured to; null where nothing has to be kept clear. */
   readonly headroom: { readonly spareM: number; readonly reason: string; readonly chainageM: number } | null;
+  /** Every water whose flood reaches the crossing; absent on options made before rivers were looked at. */
+  readonly rivers?: readonly RiverCrossed[];
   readonly deckAreaM2: number;
   readonly cost: Spread;
   readonly quartiles: readonly [q1: number, q3: number];

@@ -46,6 +46,23 @@ export interface WaterBody {
   readonly toM: number;
   readonly levelM: number;
   readonly floodLevelM: number | null;
+  /** What is known of its flood beyond the level; absent on a site nobody surveyed from a brief. */
+  readonly river?: RiverGiven;
+}
+
+/** What the brief says of a water in flood; null where it is not known. */
+export interface RiverGiven {
+  /** Stretch over which the flood stands, m, and clear height it needs under the soffit, m. */
+  readonly floodFromM: number;
+  readonly floodToM: number;
+  readonly freeboardM: number;
+  readonly flowM3s: number | null;
+  readonly velocityMs: number | null;
+  readonly allowedAffluxM: number | null;
+  readonly grainMm: number | null;
+  readonly siltFactor: number | null;
+  readonly vesselDwtT: number | null;
+  readonly vesselSpeedMs: number | null;
 }
 
 /** The deck as the structure sees it. */

@@ -116,6 +116,17 @@ export interface Water {
   /** Flood plain: stretch over which the flood level and freeboard apply. */
   readonly floodFromM: number;
   readonly floodToM: number;
+  /** Flow of the design flood, m3/s, and its mean velocity before the bridge stands, m/s; either gives the other. */
+  readonly flowM3s: number | Unknown;
+  readonly velocityMs: number | Unknown;
+  /** Rise of the flood upstream of the bridge that its authority allows, m. */
+  readonly allowedAffluxM: number | Unknown;
+  /** Median grain of the bed, mm, and Lacey's silt factor where that is known instead. */
+  readonly grainMm: number | Unknown;
+  readonly siltFactor: number | Unknown;
+  /** Largest vessel that passes, t deadweight, 0 where none does; and its speed, m/s. */
+  readonly vesselDwtT: number | Unknown;
+  readonly vesselSpeedMs: number | Unknown;
 }
 
 /** Ground along a stretch of the crossing. Odds sum to 1; a stretch of unknown ground carries preset odds. */

@@ -25,13 +25,22 @@ function limitBehind(
   return { water: `brief/waters/${water}`, known: waters[water]?.floodLevelM !== 'unknown' };
 }
 
-function limitLevels(at: At): { readonly datum: string; readonly above: string } {
+function limitLevels(at: At): {
+  readonly datum: string;
+  readonly above: string;
+  readonly afflux: readonly string[];
+} {
   const behind = limitBehind(at);
   if ('clearance' in behind)
-    return { datum: `${behind.clearance}/datumLevelM`, above: `${behind.clearance}/headroomM` };
+    return { datum: `${behind.clearance}/datumLevelM`, above: `${behind.clearance}/headroomM`, afflux: [] };
   return {
     datum: `${behind.water}/${behind.known ? 'floodLevelM' : 'levelM'}`,
     above: `${behind.water}/freeboardM`,
+    afflux:
+      behind.known &&
+      at.study.brief.waters[Number(behind.water.split('/').at(-1))]?.allowedAffluxM !== 'unknown'
+        ? [`${behind.water}/allowedAffluxM`]
+        : [],
   };
 }
 
@@ -98,9 +107,10 @@ export const siteFigures: readonly Descriptor[] = [
     label: (at) => `lowest soffit: ${limitName(at)}`,
     unit: 'm',
     method: 'sum',
-    formula: (at) => ('clearance' in limitBehind(at) ? 'level below + headroom' : 'water level + freeboard'),
+    formula: (at) =>
+      'clearance' in limitBehind(at) ? 'level below + headroom' : 'water level + freeboard + allowed afflux',
     inputs: limitLevels,
-    compute: ({ datum, above }) => datum + above,
+    compute: ({ datum, above, afflux }) => datum + above + (afflux[0] ?? 0),
   }),
   ...(['from', 'to'] as const).map((end) =>
     described({
@@ -115,6 +125,22 @@ export const siteFigures: readonly Descriptor[] = [
   ),
   ...(['fromM', 'toM', 'levelM', 'floodLevelM'] as const).map((field) =>
     copied(`site/waters/:i/${field}`, (at) => `brief/waters/${at.name('i')}/${field}`, 'water', 'm'),
+  ),
+  ...(
+    [
+      ['floodFromM', 'start of the flood', 'm'],
+      ['floodToM', 'end of the flood', 'm'],
+      ['freeboardM', 'freeboard', 'm'],
+      ['flowM3s', 'design flood flow', 'm3/s'],
+      ['velocityMs', 'mean velocity of the flood', 'm/s'],
+      ['allowedAffluxM', 'allowed afflux', 'm'],
+      ['grainMm', 'median grain of the bed', 'mm'],
+      ['siltFactor', 'silt factor', ''],
+      ['vesselDwtT', 'largest vessel', 't'],
+      ['vesselSpeedMs', 'speed of the largest vessel', 'm/s'],
+    ] as const
+  ).map(([field, label, unit]) =>
+    copied(`site/waters/:i/river/${field}`, (at) => `brief/waters/${at.name('i')}/${field}`, label, unit),
   ),
   copied(
     'site/groundStretches/:i/fromM',

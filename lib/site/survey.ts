@@ -21,13 +21,17 @@ function clearanceLimit(obstacle: Obstacle): SoffitLimit[] {
   ];
 }
 
-/** A flood level that is not known cannot be kept clear of: the ordinary level stands in, over the same stretch. */
+/**
+ * A flood level that is not known cannot be kept clear of: the ordinary level stands in, over the same stretch. The
+ * afflux that is allowed is kept clear of as well, whatever the bridge turns out to make of it.
+ */
 function floodLimit(water: Water): SoffitLimit {
   const known = water.floodLevelM !== 'unknown';
+  const afflux = known && water.allowedAffluxM !== 'unknown' ? water.allowedAffluxM : 0;
   return {
     fromM: water.floodFromM,
     toM: water.floodToM,
-    levelM: (water.floodLevelM === 'unknown' ? water.levelM : water.floodLevelM) + water.freeboardM,
+    levelM: (water.floodLevelM === 'unknown' ? water.levelM : water.floodLevelM) + water.freeboardM + afflux,
     reason: known
       ? `${water.name}, flood level and freeboard`
       : `${water.name}, ordinary level and freeboard, flood level unknown`,
@@ -35,14 +39,28 @@ function floodLimit(water: Water): SoffitLimit {
   };
 }
 
+const known = (value: number | 'unknown'): number | null => (value === 'unknown' ? null : value);
+
 function bodyOf(water: Water): WaterBody {
-  const { name, fromM, toM, levelM } = water;
+  const { name, fromM, toM, levelM, floodFromM, floodToM, freeboardM } = water;
   return {
     name,
     fromM,
     toM,
     levelM,
-    floodLevelM: water.floodLevelM === 'unknown' ? null : water.floodLevelM,
+    floodLevelM: known(water.floodLevelM),
+    river: {
+      floodFromM,
+      floodToM,
+      freeboardM,
+      flowM3s: known(water.flowM3s),
+      velocityMs: known(water.velocityMs),
+      allowedAffluxM: known(water.allowedAffluxM),
+      grainMm: known(water.grainMm),
+      siltFactor: known(water.siltFactor),
+      vesselDwtT: known(water.vesselDwtT),
+      vesselSpeedMs: known(water.vesselSpeedMs),
+    },
   };
 }
 

@@ -83,6 +83,13 @@ const water = z
     freeboardM: z.number().min(0).max(50).default(1),
     floodFromM: chainage.optional(),
     floodToM: chainage.optional(),
+    flowM3s: orUnknown(z.number().positive().max(1e6)).default('unknown'),
+    velocityMs: orUnknown(z.number().positive().max(20)).default('unknown'),
+    allowedAffluxM: orUnknown(z.number().min(0).max(10)).default('unknown'),
+    grainMm: orUnknown(z.number().positive().max(1000)).default('unknown'),
+    siltFactor: orUnknown(z.number().positive().max(50)).default('unknown'),
+    vesselDwtT: orUnknown(z.number().min(0).max(1e6)).default('unknown'),
+    vesselSpeedMs: orUnknown(z.number().positive().max(20)).default('unknown'),
   })
   .transform((given) => ({
     ...given,

@@ -1,4 +1,5 @@
 import { described, type At, type Descriptor, type Foundation } from '../model/index.ts';
+import { flowAt, type FlowAt } from '../river/index.ts';
 import { settingAt } from './setting.ts';
 import { supportName } from './supportFigures.ts';
 
@@ -48,6 +49,37 @@ const floods = (at: At): string[] => {
   );
 };
 
+/** The design flood at a support, where its flow is known. */
+const flowOver = (at: At): FlowAt | null => flowAt(at.appraisal.site, at.support.chainageM);
+
+/** A figure of the river whose flood reaches a support. */
+function riverOf(at: At, field: string): string[] {
+  const water = flowOver(at)?.water;
+  const index = (at.option.rivers ?? []).findIndex((river) => river.water === water);
+  return index < 0 ? [] : [`${at.root}/rivers/${index}/${field}`];
+}
+
+/** What the brief gives of that river, where it does. */
+function givenOf(at: At, field: 'siltFactor' | 'grainMm'): string[] {
+  const water = flowOver(at)?.water;
+  const given = water === undefined ? null : at.appraisal.site.waters[water]!.river?.[field];
+  return given == null ? [] : [`site/waters/${water}/river/${field}`];
+}
+
+const groundLine = (at: At): string[] => at.appraisal.site.groundZ.map((_, i) => `site/groundZ/${i}`);
+
+const pierScour = (name: string): string => `data/river/pierScour/${name}`;
+const hec18 = {
+  factor: pierScour('factor'),
+  nose: pierScour('noseFactor'),
+  bed: pierScour('bedFactor'),
+  wide: pierScour('widthPower'),
+  fast: pierScour('froudePower'),
+  slow: pierScour('slowFroude'),
+  mostSlow: pierScour('mostSlow'),
+  mostFast: pierScour('mostFast'),
+} as const;
+
 /** What the foundations of a support have in common, and what each is for its own ground. */
 export const foundationFigures: readonly Descriptor[] = [
   described({
@@ -64,6 +96,85 @@ export const foundationFigures: readonly Descriptor[] = [
       water: `${at.foot}/waterDepthM`,
     }),
     compute: ({ floods: levels, ground, water }) => Math.max(water, ...levels.map((level) => level - ground)),
+  }),
+  described({
+    path: support('floodVelocityMs'),
+    label: on('velocity of the flood'),
+    unit: 'm/s',
+    method: 'share of the flow',
+    formula:
+      'flow x depth^(2/3) / integral of depth^(5/3) between the abutments, square to the flow (Manning)',
+    value: (at) => flowOver(at)?.velocityMs ?? null,
+    inputs: (at) => ({
+      flow: riverOf(at, 'flowM3s'),
+      depth: `${at.foot}/floodDepthM`,
+      ground: groundLine(at),
+    }),
+  }),
+  described({
+    path: support('laceyM'),
+    label: on("Lacey's depth under the flood"),
+    unit: 'm',
+    method: 'product',
+    formula: '1.34 (q^2 / f)^(1/3), q depth x velocity, f silt factor or 1.76 sqrt(d50)',
+    value: (at) => flowOver(at)?.laceyM ?? null,
+    inputs: (at) => ({
+      depth: `${at.foot}/floodDepthM`,
+      velocity: `${at.foot}/floodVelocityMs`,
+      factor: 'data/river/lacey/depthFactor',
+      perGrain: 'data/river/lacey/siltFactor',
+      silt: givenOf(at, 'siltFactor'),
+      grain: givenOf(at, 'grainMm'),
+    }),
+    compute: (v) => {
+      const f = v.silt[0] ?? v.perGrain * Math.sqrt(v.grain[0] ?? NaN);
+      return v.factor * Math.cbrt((v.depth * v.velocity) ** 2 / f);
+    },
+  }),
+  described({
+    path: support('pierScourM'),
+    label: on('hole at the pier'),
+    unit: 'm',
+    method: 'equation of HEC-18',
+    formula: '2 K1 K3 a^0.65 y^0.35 Fr^0.43, at most 2.4 a, or 3 a where Fr > 0.8; a thickness of the pier',
+    inputs: (at) => ({
+      depth: `${at.foot}/floodDepthM`,
+      velocity: `${at.foot}/floodVelocityMs`,
+      thickness: `${at.foot}/shaft/lengthM`,
+      ...hec18,
+    }),
+    compute: (v) => {
+      const froude = v.velocity / Math.sqrt(9.81 * v.depth);
+      const hole = v.factor * v.nose * v.bed * v.depth * (v.thickness / v.depth) ** v.wide * froude ** v.fast;
+      return Math.min(hole, (froude > v.slow ? v.mostFast : v.mostSlow) * v.thickness);
+    },
+  }),
+  described({
+    path: support('scourM'),
+    when: (at) => flowOver(at) !== null,
+    label: on('depth of scour'),
+    unit: 'm',
+    method: 'deeper of two',
+    formula: (at) =>
+      at.support.kind === 'abutment'
+        ? "1.27 x Lacey's depth - depth of the flood, at least 0; preset where the bed is not known"
+        : "2 x Lacey's depth - depth of the flood; or general scour, Lacey's depth - depth of the flood or a preset where the bed is not known, + the hole at the pier",
+    inputs: (at) => {
+      const wall = at.support.kind === 'abutment';
+      const bed = flowOver(at)?.laceyM != null;
+      return {
+        flood: `${at.foot}/floodDepthM`,
+        lacey: bed ? [`${at.foot}/laceyM`] : [],
+        times: `data/river/lacey/${wall ? 'atWall' : 'atPier'}`,
+        preset: scour(at.support.waterDepthM > 0 ? 'generalRiverM' : 'generalPlainM'),
+        hole: wall ? [] : [`${at.foot}/pierScourM`],
+      };
+    },
+    compute: ({ flood, lacey: [lacey], times, preset, hole: [hole = 0] }) =>
+      Math.max(
+        (lacey === undefined ? preset : Math.max(0, lacey - flood)) + hole,
+        lacey === undefined ? 0 : times * lacey - flood,
+      ),
   }),
   described({
     path: support('scourM'),

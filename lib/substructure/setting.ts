@@ -1,4 +1,5 @@
 import type { Site } from '../model/index.ts';
+import { flowAt, scourAt, type FlowAt } from '../river/index.ts';
 import { groundAt, waterDepthAt } from '../site/index.ts';
 import { substructureData } from './data.ts';
 
@@ -11,6 +12,8 @@ export interface Setting {
   readonly waterLevelM: number | null;
   /** Depth of the flood over the ground; 0 where none reaches. */
   readonly floodDepthM: number;
+  /** The design flood here where its flow is known; null elsewhere. */
+  readonly flow: FlowAt | null;
   /** Nearest traffic that could strike a support here, with the force at its height, kN and m; null where none is near. */
   readonly impact: { readonly forceKN: number; readonly heightM: number } | null;
 }
@@ -32,7 +35,14 @@ export function settingAt(site: Site, chainageM: number): Setting {
     if (waterLevelM === null) waterLevelM = water.levelM;
     if (water.floodLevelM !== null) floodDepthM = Math.max(floodDepthM, water.floodLevelM - groundLevelM);
   }
-  return { groundLevelM, waterDepthM, waterLevelM, floodDepthM, impact: impactNear(site, chainageM) };
+  return {
+    groundLevelM,
+    waterDepthM,
+    waterLevelM,
+    floodDepthM,
+    flow: flowAt(site, chainageM),
+    impact: impactNear(site, chainageM),
+  };
 }
 
 function impactNear(site: Site, chainageM: number): Setting['impact'] {
@@ -50,13 +60,15 @@ const covers = (stretch: { fromM: number; toM: number }, x: number): boolean =>
   x >= stretch.fromM && x <= stretch.toM;
 
 /**
- * Depth of scour below the bed or ground, m: general scour plus the local hole at a pier, 1.5 b tanh(y / b) for
- * flood depth y and pier thickness b across the flow (Breusers, Nicollet and Shen 1977, from memory). 0 where no flood reaches.
+ * Depth of scour below the bed or ground, m, at a pier of a thickness across the flow, m, or at a wall (thickness 0).
+ * Where the flow of the flood is known by HEC-18 and Lacey (`lib/river`); else preset general scour plus the hole at a pier,
+ * 1.5 b tanh(y / b) for flood depth y and thickness b (Breusers, Nicollet and Shen 1977, from memory). 0 where no flood reaches.
  */
 export function scourDepth(setting: Setting, thicknessM: number): number {
   if (!(setting.floodDepthM > 0)) return 0;
   const { generalRiverM, generalPlainM, localFactor } = substructureData.scour;
   const general = setting.waterDepthM > 0 ? generalRiverM : generalPlainM;
+  if (setting.flow !== null) return scourAt(setting.flow, thicknessM, general);
   const local = thicknessM > 0 ? localFactor * thicknessM * Math.tanh(setting.floodDepthM / thicknessM) : 0;
   return general + local;
 }

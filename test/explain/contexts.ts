@@ -55,3 +55,46 @@ export const otherwise = (): Context =>
       },
     };
   });
+
+/** The same crossing with its river known and piers standing in it: flow and velocity, bed, afflux allowed. */
+export const inFlood = (): Context =>
+  once('inFlood', () => {
+    const study = lowFerry();
+    const { brief } = study;
+    return {
+      ...study,
+      brief: {
+        ...brief,
+        obstacles: brief.obstacles.map((one) =>
+          one.kind === 'river' ? { ...one, supports: 'none', clearance: null } : one,
+        ),
+        waters: brief.waters.map((water) => ({
+          ...water,
+          flowM3s: 420,
+          velocityMs: 1.5,
+          allowedAffluxM: 0.1,
+          grainMm: 2,
+        })),
+      },
+      books: { ...study.books, draws: 300 },
+      options: {
+        ...study.options,
+        forms: ['composite-i'],
+        kept: [
+          {
+            number: 40,
+            form: 'composite-i',
+            method: 'crane',
+            units: [
+              {
+                form: 'composite-i',
+                role: 'main',
+                supportsM: [1240, 1281, 1313, 1345, 1377, 1408, 1439, 1470],
+              },
+            ],
+            depthM: null,
+          },
+        ],
+      },
+    };
+  });

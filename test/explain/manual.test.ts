@@ -1,16 +1,17 @@
 import { describe, expect, it } from 'vitest';
 import { figure, figurePaths, rebuilt, type Context } from '../../lib/explain/index.ts';
 import { bibliography } from '../../lib/rules/index.ts';
-import { example, otherwise } from './contexts.ts';
+import { example, inFlood, otherwise } from './contexts.ts';
 
 const contexts: readonly (readonly [name: string, context: () => Context])[] = [
   ['the worked example', example],
   ['the crossing seen otherwise', otherwise],
+  ['the crossing in a known flood', inFlood],
 ];
 
-/** What holds a number that is not a figure: names of options, units, supports and stretches, and what is drawn. */
+/** What holds a number that is not a figure: names of options, units, supports, stretches and waters, and what is drawn. */
 const notFigures =
-  /\/(number|unit|support|stretch|pylons\/\d+|groups\/\d+\/\d+)$|\/(elevation|sections|depthAlong)\//u;
+  /\/(number|unit|support|stretch|water|pylons\/\d+|groups\/\d+\/\d+)$|\/(elevation|sections|depthAlong)\//u;
 
 /** Paths of all numbers of a result, lists of options, parts, rulings and checks by the names of their entries. */
 function numbersIn(value: unknown, path: string, by?: string): string[] {

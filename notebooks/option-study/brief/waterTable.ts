@@ -27,6 +27,13 @@ export function newWater({ brief }: Study): Water {
     freeboardM: 1,
     floodFromM: fromM,
     floodToM: toM,
+    flowM3s: 'unknown',
+    velocityMs: 'unknown',
+    allowedAffluxM: 'unknown',
+    grainMm: 'unknown',
+    siltFactor: 'unknown',
+    vesselDwtT: 'unknown',
+    vesselSpeedMs: 'unknown',
   };
 }
 
