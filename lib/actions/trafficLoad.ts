@@ -15,7 +15,7 @@ export interface TrafficLoad {
   /** Loaded lanes behind the factor. */
   readonly loadedLanes: number;
   /** How it was shared out across the deck. */
-  readonly distribution: 'whole deck' | 'lever rule' | 'rigid crossbeam' | 'AASHTO factors';
+  readonly distribution: 'whole deck' | 'lever rule' | 'rigid crossbeam' | 'linked beams' | 'AASHTO factors';
   /** Typed by the user: load per lane against loaded length, used instead beyond the reach of the standard. */
   readonly longSpan?: LongSpanLoad;
 }

@@ -5,6 +5,7 @@ import { roadFigures } from '../appraise/roadFigures.ts';
 import { rulingFigures } from '../appraise/rulingFigures.ts';
 import { arrangementFigures } from '../arrange/figures.ts';
 import { standingFigures } from '../decide/figures.ts';
+import { adjacentFigures } from '../forms/adjacent-box/figures.ts';
 import { cableFigures } from '../forms/cable-stayed/figures.ts';
 import { cantileverFigures } from '../forms/cantilever-box/figures.ts';
 import { compositeBoxFigures } from '../forms/composite-box/figures.ts';
@@ -48,6 +49,7 @@ export const manual: readonly Descriptor[] = [
   ...compositeBoxFigures,
   ...boxFigures,
   ...precastIFigures,
+  ...adjacentFigures,
   ...halfThroughFigures,
   ...trussFigures,
   ...cableFigures,

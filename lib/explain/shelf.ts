@@ -1,3 +1,4 @@
+import adjacentBox from '../../data/forms/adjacent-box.json';
 import cableStayed from '../../data/forms/cable-stayed.json';
 import compositeBox from '../../data/forms/composite-box.json';
 import compositeI from '../../data/forms/composite-i.json';
@@ -42,6 +43,7 @@ const files: Readonly<Record<string, unknown>> = {
   'concrete-box': concreteBox,
   'precast-i': precastI,
   pretensioned,
+  'adjacent-box': adjacentBox,
   'half-through': halfThrough,
   truss,
   'cable-stayed': cableStayed,

@@ -1,4 +1,5 @@
 import type { FormId } from '../model/index.ts';
+import { adjacentBox } from './adjacent-box/index.ts';
 import { cableStayed } from './cable-stayed/index.ts';
 import { cantileverBox } from './cantilever-box/index.ts';
 import { compositeBox } from './composite-box/index.ts';
@@ -16,6 +17,7 @@ export type { FormModule, Pattern } from './formModule.ts';
 export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   slab,
   'precast-i': precastI,
+  'adjacent-box': adjacentBox,
   'half-through': halfThrough,
   'composite-i': compositeI,
   'composite-box': compositeBox,

@@ -10,6 +10,7 @@ export const iBeams: PrecastForm = {
   form: 'precast-i',
   relief: precastData.relief,
   diaphragm: precastData.diaphragm,
+  spans: 'continuous',
   crossWalls,
   traffic: beamTraffic,
   choices: rankedChoices,
@@ -26,6 +27,5 @@ function crossWalls({ layout, shape, haunchM }: BeamChoice): CrossWalls {
     supportM2: between * (shape.depthM + haunchM),
     withinM2: heightShare * shape.depthM * between,
     ofBeamM2: heightShare * shape.depthM * one,
-    inBeam: false,
   };
 }

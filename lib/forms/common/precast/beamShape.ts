@@ -18,6 +18,8 @@ export interface BeamOutline {
   readonly bottomFlangeM: number;
   readonly points: readonly SectionPoint[];
   readonly holes: readonly (readonly SectionPoint[])[];
+  /** Axis of a strand from the faces of holes, m, where it may be nearer than to the outside. */
+  readonly voidAxisM?: number;
 }
 
 /** A precast beam: outline, section and where its strands fit. */

@@ -7,6 +7,8 @@ import { strandsAt, type StrandPlan, type StrandsThere } from './strandPlan.ts';
 /** Links of one beam of a span and how far its web is used. */
 export interface BeamShear {
   readonly mostKN: number;
+  /** Of traffic alone, characteristic. */
+  readonly trafficKN: number;
   /** Struts over their strength, links over what fits. */
   readonly crushing: number;
   readonly crowding: number;
@@ -37,6 +39,7 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
   const twist = model.torsion ? (model.torsion.armM * shape.depthM) / model.torsion.cellM2 : 0;
   const leastM2PerM = pretensioned.beamBars.leastLinksM2PerM;
   let mostKN = 0;
+  let trafficKN = 0;
   let crushing = 0;
   let crowding = 0;
   let linksM2 = 0;
@@ -65,12 +68,14 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
         const added = effects[side][at]!;
         const lasting =
           uls.permanent * own + uls.superimposed * (added - Math.sign(added) * model.superimposedKNm * away);
-        for (const traffic of [envelope.shearMaxKN[at]!, envelope.shearMinKN[at]!])
+        for (const traffic of [envelope.shearMaxKN[at]!, envelope.shearMinKN[at]!]) {
+          trafficKN = Math.max(trafficKN, Math.abs(traffic));
           shearKN = Math.max(
             shearKN,
             Math.abs(lasting + uls.traffic * traffic - towards * carried) +
               uls.traffic * twist * Math.abs(traffic),
           );
+        }
       }
     }
     mostKN = Math.max(mostKN, shearKN);
@@ -89,7 +94,7 @@ export function beamShear(model: PrecastModel, span: number, plan: StrandPlan): 
     crowding = Math.max(crowding, use.crowding);
     linksM2 += Math.max(use.stirrupsM2PerM, leastM2PerM) * step;
   }
-  return { mostKN, crushing, crowding, linksM2 };
+  return { mostKN, trafficKN, crushing, crowding, linksM2 };
 }
 
 /** Shear of the diaphragms within a simple span at x, kN; the mean of both sides under a diaphragm. */

@@ -2,6 +2,7 @@ import { trafficOnDeck, trafficOnInfluence } from '../../../actions/index.ts';
 import { beamTrack, deflectionInfluence } from '../../../mechanics/index.ts';
 import type { Check } from '../../../model/index.ts';
 import { check } from '../checks.ts';
+import { beamSolidsM3 } from './beamSolids.ts';
 import { liftingSafety } from './liftingStability.ts';
 import { pretensioned } from './pretensioned.ts';
 import { elementsPerSpan, type PrecastModel } from './precastModel.ts';
@@ -86,7 +87,8 @@ export function precastChecks(model: PrecastModel, beams: SizedBeams): Check[] {
 /** The longest beam: its length, m, and mass, t. */
 export function heaviestBeam(model: PrecastModel): { readonly lengthM: number; readonly massT: number } {
   const lengthM = Math.max(...model.task.spansM);
-  return { lengthM, massT: (model.ownKNm * lengthM) / 9.81 };
+  const gamma = model.standard.unitWeights.concreteKNm3;
+  return { lengthM, massT: (model.ownKNm * lengthM + gamma * beamSolidsM3(model, lengthM)) / 9.81 };
 }
 
 /** Deflection of the longest span under all lanes shared by all beams, and what the standard allows, m. */

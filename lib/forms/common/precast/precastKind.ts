@@ -18,8 +18,8 @@ export interface CrossWalls {
   readonly withinM2: number;
   /** Within a span, what hangs on one beam. */
   readonly ofBeamM2: number;
-  /** True where those within a span are cast with the beam. */
-  readonly inBeam: boolean;
+  /** Where those within a span are cast with the beam: length of the solid block at each end of it, m. */
+  readonly endBlockM?: number;
 }
 
 /** How the kinds of pretensioned beam under a slab differ for their statics. */
@@ -28,6 +28,8 @@ export interface PrecastKind {
   /** What is done with strands at the ends of a beam. */
   readonly relief: Readonly<Record<StandardId, 'debonded' | 'draped'>>;
   readonly diaphragm: DiaphragmData;
+  /** Over piers: beams made continuous for traffic, or spans by themselves with the slab run through between them. */
+  readonly spans: 'continuous' | 'linked';
   readonly crossWalls: (choice: BeamChoice) => CrossWalls;
   /** Traffic on the beam that carries most, or on beam `beam`; `ratio` is the modulus of the beam over that of the slab. */
   readonly traffic: (

@@ -1,9 +1,10 @@
 import type { MeasuredLine } from '../../../model/index.ts';
-import { barKg } from '../bars.ts';
+import { barDesignMPa, barKg } from '../bars.ts';
 import { measured } from '../measured.ts';
 import { slabData } from '../slab/slabData.ts';
 import { diaphragmsWithin } from './beamMoments.ts';
 import { pretensioned } from './pretensioned.ts';
+import { beamSolidsM3 } from './beamSolids.ts';
 import type { PrecastModel } from './precastModel.ts';
 import type { SizedBeams } from './sizeBeams.ts';
 
@@ -32,6 +33,7 @@ export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2:
   const { spansM } = task;
   const areaM2 = lengthM * task.deck.widthM;
   const beamM3 = layout.count * shape.areaM2 * lengthM;
+  const solidM3 = layout.count * spansM.reduce((sum, spanM) => sum + beamSolidsM3(model, spanM), 0);
   const slabM3 = slab.meanM * areaM2;
   const fillM3 = layout.count * haunchM * shape.topWidthM * lengthM;
   const one = diaphragmM3(model);
@@ -54,6 +56,7 @@ export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2:
     (sum, { bottomBarsM2 }) => sum + barKg(bottomBarsM2, continuity.connectionLengthM),
     0,
   );
+  const torsionKg = layout.count * torsionBarsKg(model, beams);
   const laps = slabData.lapAndDetail.value;
   const mm = (value: number): string => (value * 1000).toFixed(0);
   const counts = [...new Set(beams.strands.map(({ plan }) => plan.count))].join(', ');
@@ -67,6 +70,9 @@ export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2:
       'precast beams',
       `${layout.count} lines of ${shape.name}, ${shape.areaM2.toFixed(3)} m2`,
     ),
+    ...(solidM3 > 0
+      ? [measured('deck', 'precast-concrete', solidM3, 'solid ends and walls of the beams', 'cast with them')]
+      : []),
     measured(
       'deck',
       'pretensioned-strand',
@@ -89,6 +95,9 @@ export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2:
       `at ${spansM.length + 1} supports and ${within} within spans`,
     ),
     bars(layout.count * (laps * linksKg), 'links of the beams', 'by shear, least elsewhere; laps included'),
+    ...(torsionKg > 0
+      ? [bars(laps * torsionKg, 'bars along for torsion', 'torque of the closed cell, EN 1992-1-1 6.3.2 (3)')]
+      : []),
     bars(beamBars.alongKgM3 * beamM3, 'bars along the beams', `${beamBars.alongKgM3} kg/m3`),
     bars(
       slab.mainBarsKgM2 * areaM2,
@@ -111,4 +120,20 @@ export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2:
       'soffit between top flanges, overhangs and edges',
     ),
   ];
+}
+
+/**
+ * Bars along one line of beams for torsion, kg: T u / (2 A fyd) at struts of 45 degrees by the greatest torque of the ends of
+ * each span, three quarters of it on average (strand carries its part of the chord in bending only).
+ */
+function torsionBarsKg(
+  { torsion, task, standard, standardId }: PrecastModel,
+  { shears }: SizedBeams,
+): number {
+  if (!torsion) return 0;
+  const fy = barDesignMPa(standardId) * 1e3;
+  return task.spansM.reduce((sum, spanM, span) => {
+    const torqueKNm = standard.factors.uls.traffic * torsion.armM * shears[span]!.trafficKN;
+    return sum + barKg((0.75 * torqueKNm * torsion.aroundM) / (2 * torsion.cellM2 * fy), spanM);
+  }, 0);
 }

@@ -95,7 +95,12 @@ export function precastModel(
   const carried = kind.traffic(task, choice, composite, 1 / composite.slabRatio, beamIndex);
   const traffic = amplified(carried.load, curve);
   const eiKNm2 = beamConcrete.ecmMPa * 1e3 * composite.inertiaM4;
-  const beam = lineBeam({ spansM: task.spansM, stationsPerSpan: elementsPerSpan, eiKNm2: () => eiKNm2 });
+  const beam = lineBeam({
+    spansM: task.spansM,
+    stationsPerSpan: elementsPerSpan,
+    eiKNm2: () => eiKNm2,
+    hingesM: kind.spans === 'linked' ? supportsM.slice(1, -1) : [],
+  });
   const superimposedKNm = (curve * task.deck.superimposedKNm) / layout.count;
   const most = trafficEnvelope(beam, traffic, { deflection: false });
   const heightM = shape.depthM + haunchM + slab.rootM;

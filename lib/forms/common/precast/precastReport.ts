@@ -3,6 +3,7 @@ import { beamTrack, reactionInfluence } from '../../../mechanics/index.ts';
 import type { MeasuredLine, SupportReaction } from '../../../model/index.ts';
 import { quantityOf } from '../measured.ts';
 import { beamMoments, diaphragmsWithin, noMoments } from './beamMoments.ts';
+import { beamSolidsM3 } from './beamSolids.ts';
 import { liftingSafety } from './liftingStability.ts';
 import { heaviestBeam } from './precastChecks.ts';
 import { diaphragmM3 } from './precastLines.ts';
@@ -20,7 +21,10 @@ export function precastReactions(model: PrecastModel): SupportReaction[] {
     gamma * (layout.count * (shape.areaM2 + model.haunchM * shape.topWidthM) + slab.meanM * task.deck.widthM);
   const one = diaphragmM3(model);
   const half = task.spansM.map(
-    (spanM) => (ownKNm * spanM) / 2 + (gamma * one.withinM3 * diaphragmsWithin(model, spanM)) / 2,
+    (spanM) =>
+      (ownKNm * spanM) / 2 +
+      (gamma * one.withinM3 * diaphragmsWithin(model, spanM)) / 2 +
+      (gamma * layout.count * beamSolidsM3(model, spanM)) / 2,
   );
   const deck = trafficOnDeck(task.standard, task.deck);
   const track = beamTrack(beam);
@@ -76,6 +80,9 @@ export function precastFigures(
     curvatureFactor: model.curve,
     laneVehicles: model.traffic.vehicleFactor,
     trafficUniformKNm: model.traffic.udlKNm,
+    ...(model.torsion
+      ? { torqueArmM: model.torsion.armM, cellM2: model.torsion.cellM2, shearRatio: model.traffic.shearRatio }
+      : {}),
     ownKNm: model.ownKNm,
     wetKNm: model.wetKNm,
     superimposedKNm: model.superimposedKNm,

@@ -22,6 +22,6 @@ export function sizeBeams(model: PrecastModel): SizedBeams {
   return {
     strands,
     shears: strands.map(({ plan }, span) => beamShear(model, span, plan)),
-    piers: spansM.slice(1).map((_, i) => pierContinuity(model, i + 1)),
+    piers: model.kind.spans === 'linked' ? [] : spansM.slice(1).map((_, i) => pierContinuity(model, i + 1)),
   };
 }

@@ -13,13 +13,17 @@ interface Grid {
   readonly depthM: number;
   readonly points: readonly SectionPoint[];
   readonly holes: readonly (readonly SectionPoint[])[];
+  readonly voidAxisM?: number;
 }
 
 /**
  * Strands that fit in a beam, row by row from the bottom: a square grid, half a pitch either side of the middle, every
- * strand at least the axis distance from every face. Rows above a share of the depth are left out.
+ * strand at least the axis distance from the outline and from holes. Rows above a share of the depth are left out.
  */
-export function strandRows({ depthM, points, holes }: Grid, standard: StandardId): readonly StrandRow[] {
+export function strandRows(
+  { depthM, points, holes, voidAxisM }: Grid,
+  standard: StandardId,
+): readonly StrandRow[] {
   const { strand } = pretensioned;
   const pitch = strand.pitchM[standard];
   const axis = strand.axisM[standard];
@@ -27,19 +31,21 @@ export function strandRows({ depthM, points, holes }: Grid, standard: StandardId
   const rows: StrandRow[] = [];
   for (let z = axis; z <= strand.mostHeightShare * depthM + 1e-9; z += pitch) {
     let count = 0;
-    for (let y = pitch / 2; y < outM; y += pitch) if (inside(points, holes, y, z, axis)) count += 2;
+    for (let y = pitch / 2; y < outM; y += pitch)
+      if (inside(points, holes, y, z, axis, voidAxisM ?? axis)) count += 2;
     if (count > 0) rows.push({ zM: z, count });
   }
   return rows;
 }
 
-/** True for a point inside an outline, outside its holes and at least `clear` from all of them. */
+/** True for a point inside an outline, outside its holes and far enough from both. */
 function inside(
   points: readonly SectionPoint[],
   holes: readonly (readonly SectionPoint[])[],
   y: number,
   z: number,
   clear: number,
+  clearOfHoles: number,
 ): boolean {
   let within = false;
   for (const ring of [points, ...holes])
@@ -47,7 +53,7 @@ function inside(
       const [y0, z0] = ring[i]!;
       const [y1, z1] = ring[(i + 1) % ring.length]!;
       if (z0 > z !== z1 > z && y < y0 + ((z - z0) / (z1 - z0)) * (y1 - y0)) within = !within;
-      if (distance(y, z, y0, z0, y1, z1) < clear - 1e-9) return false;
+      if (distance(y, z, y0, z0, y1, z1) < (ring === points ? clear : clearOfHoles) - 1e-9) return false;
     }
   return within;
 }
