@@ -15,6 +15,7 @@ import { designFigures } from '../forms/figures.ts';
 import { floorPractice } from '../forms/floor/floorFigures.ts';
 import { precastIFigures } from '../forms/precast-i/figures.ts';
 import { halfThroughFigures } from '../forms/half-through/figures.ts';
+import { troughFigures } from '../forms/precast-trough/figures.ts';
 import { slabBridgeFigures } from '../forms/slab/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
@@ -49,6 +50,7 @@ export const manual: readonly Descriptor[] = [
   ...compositeBoxFigures,
   ...boxFigures,
   ...precastIFigures,
+  ...troughFigures,
   ...adjacentFigures,
   ...halfThroughFigures,
   ...trussFigures,

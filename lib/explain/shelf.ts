@@ -7,6 +7,7 @@ import fatigue from '../../data/forms/fatigue.json';
 import floor from '../../data/forms/floor.json';
 import plates from '../../data/forms/plates.json';
 import precastI from '../../data/forms/precast-i.json';
+import precastTrough from '../../data/forms/precast-trough.json';
 import pretensioned from '../../data/forms/pretensioned.json';
 import slab from '../../data/forms/slab.json';
 import slabDeck from '../../data/forms/slab-deck.json';
@@ -43,6 +44,7 @@ const files: Readonly<Record<string, unknown>> = {
   'concrete-box': concreteBox,
   'precast-i': precastI,
   pretensioned,
+  'precast-trough': precastTrough,
   'adjacent-box': adjacentBox,
   'half-through': halfThrough,
   truss,

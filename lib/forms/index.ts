@@ -9,6 +9,7 @@ import type { FormModule } from './formModule.ts';
 import { slab } from './slab/index.ts';
 import { halfThrough } from './half-through/index.ts';
 import { precastI } from './precast-i/index.ts';
+import { precastTrough } from './precast-trough/index.ts';
 import { truss } from './truss/index.ts';
 
 export type { FormModule, Pattern } from './formModule.ts';
@@ -17,6 +18,7 @@ export type { FormModule, Pattern } from './formModule.ts';
 export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   slab,
   'precast-i': precastI,
+  'precast-trough': precastTrough,
   'adjacent-box': adjacentBox,
   'half-through': halfThrough,
   'composite-i': compositeI,

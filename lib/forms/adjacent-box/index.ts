@@ -13,5 +13,6 @@ export const adjacentBox: FormModule = {
   name: 'Adjacent box beams',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
+  ignoresHeight: true,
   size: (task) => sizePrecast(boxBeams, task),
 };
