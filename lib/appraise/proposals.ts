@@ -1,7 +1,8 @@
 import { arrange } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
 import type { Arrangement, FormId, MethodId } from '../model/index.ts';
-import { rule, rulingsFor } from '../rules/index.ts';
+import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
+import { openSpans } from './openSpans.ts';
 import { arrangementFacts, formFacts } from './facts.ts';
 import type { Proposals } from './memory.ts';
 import { relaxationWords } from './relaxationWords.ts';
@@ -20,8 +21,18 @@ function meetsTrouble(bench: Workbench, arrangement: Arrangement): boolean {
   );
 }
 
-/** Why the rules put a form out of this study; empty where they do not, or where it is to be worked out all the same. */
+/**
+ * Why a form is not searched in this study: no span of it or of its approach fits between the abutments, or the rules put
+ * it out and it is not asked to be worked out all the same. Empty where it is searched.
+ */
 export function outBecause({ study, site }: Workbench, form: FormId): readonly string[] {
+  const { pattern } = formModule(form);
+  for (const part of pattern.kind === 'continuous' ? [form] : [form, pattern.approach]) {
+    if (!openSpans(part, site.lengthM)) {
+      const [least] = spanWindow(part).possible;
+      return [`its spans begin at ${least} m; the crossing is ${site.lengthM} m long`];
+    }
+  }
   if (study.options.workOutAnyway.includes(form)) return [];
   const rulings = rulingsFor('form', form, formFacts(site));
   return rulings.filter(({ effect }) => effect === 'out').flatMap(({ because }) => because);

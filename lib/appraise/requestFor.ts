@@ -1,7 +1,8 @@
 import type { ArrangeRequest, Windows } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
 import type { Site } from '../model/index.ts';
-import { endRatioWindow, spanWindow } from '../rules/index.ts';
+import { endRatioWindow } from '../rules/index.ts';
+import { openSpans } from './openSpans.ts';
 import type { FormAndMethod } from './trialRows.ts';
 
 /** Half a pier along the road with its working space, kept clear of barred stretches, m. Common practice, no source. */
@@ -10,10 +11,12 @@ export const PIER_HALF_WIDTH_M = 1.5;
 const ANY_END_RATIO = [0.5, 1] as const;
 
 function windowsOf(form: FormAndMethod['form'], site: Site): Windows {
-  const { possible } = spanWindow(form);
+  const open = openSpans(form, site.lengthM);
+  if (!open)
+    throw new RangeError(`arrangement: ${form} has no span that fits a crossing of ${site.lengthM} m`);
   return {
-    minSpanM: possible[0],
-    maxSpanM: Math.min(possible[1], site.lengthM),
+    minSpanM: open[0],
+    maxSpanM: open[1],
     endRatio: endRatioWindow(form) ?? ANY_END_RATIO,
   };
 }

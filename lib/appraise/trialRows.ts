@@ -1,10 +1,11 @@
 import { formModule } from '../forms/index.ts';
 import type { Design, FormId, MeasuredLine, MethodId, Site } from '../model/index.ts';
-import { sideRatioWindow, spanWindow } from '../rules/index.ts';
+import { sideRatioWindow } from '../rules/index.ts';
 import { deckOnSupport } from '../substructure/index.ts';
 import { methodLines } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
 import type { Kept } from '../kept.ts';
+import { openSpans } from './openSpans.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { TrialRow } from './memory.ts';
 import type { Sizer } from './sizer.ts';
@@ -72,12 +73,11 @@ export interface RowMakers {
  */
 export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): TrialRows {
   const { site, size, costOf, rows, booksKey } = makers;
-  const { possible } = spanWindow(form);
-  const least = Math.max(possible[0], LEAST_SPAN_M);
-  const most = Math.min(possible[1], site.lengthM);
-  if (!(least <= most)) {
+  const open = openSpans(form, site.lengthM);
+  if (!open)
     throw new RangeError(`cost table: ${form} has no span that fits a crossing of ${site.lengthM} m`);
-  }
+  const [, most] = open;
+  const least = Math.min(most, Math.max(open[0], LEAST_SPAN_M));
   const spansM = Array.from(
     { length: TABLE_SPANS },
     (_, i) => least * Math.pow(most / least, i / (TABLE_SPANS - 1)),

@@ -11,6 +11,8 @@ export interface FormModule {
   readonly pattern: Pattern;
   /** Methods of construction, the usual one first. */
   readonly methods: readonly [MethodId, ...MethodId[]];
+  /** Longest span that `size` can lay out, m, where that is less than the published band of the form. */
+  readonly mostSpanM?: number;
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
   readonly ignoresHeight?: true;
   /**

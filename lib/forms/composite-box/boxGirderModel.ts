@@ -21,15 +21,17 @@ export interface BoxGirderModel extends GirderModel {
 /**
  * Lays out the boxes and makes a girder of half of one: one web, one top flange, half of the bottom plate, half of what
  * the box carries. Torsion goes round the box and into the webs as shear.
+ *
+ * @param lean how far the webs lean, 0 upright, 1 as far as the bottom plate stays wide enough
  */
-export function boxGirderModel(task: UnitTask): BoxGirderModel {
+export function boxGirderModel(task: UnitTask, lean: number): BoxGirderModel {
   const tubs = tubLayout(task);
   const model = modelOn(task, tubs, 1, {
     stiff: true,
     even: tubs.boxes > 1,
     trafficOn: () => halfOf(worstBox(task, tubs)),
   });
-  const shape = tubShape(tubs, model.girderM);
+  const shape = tubShape(tubs, model.girderM, lean);
   const braceAtM = frameLines(task, model.supportsM);
   const bracingM = bays(model.elementM, braceAtM);
   const moments = model.guessKNm.map((moment) => 2 * moment);

@@ -16,6 +16,9 @@ import { boxGirderModel } from './boxGirderModel.ts';
 import { boxGirderFigures } from './boxGirderReport.ts';
 import { boxSteelOf } from './boxSteel.ts';
 
+/** How far webs lean, of the most they may; the first is preferred. */
+const LEANS = [1, 0.5, 0] as const;
+
 /**
  * Composite box girders of constant depth: one steel tub, or more on wide decks, with leaning webs and a ribbed bottom
  * plate, closed by a concrete slab; built unpropped. `depthM` of the task is soffit to top of slab over the webs. Simple
@@ -33,7 +36,17 @@ export const compositeBox: FormModule = {
 /** @throws RangeError for spans, depth or widths that are not possible */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
-  const model = boxGirderModel(task);
+  // Leaning webs save bottom plate and bring the bearings together: where one of them would lift the webs stand up.
+  let design = sizeWith(task, LEANS[0]);
+  for (const lean of LEANS.slice(1)) {
+    if (!design.checks.some(({ id, utilisation }) => id === 'bearing-uplift' && utilisation > 1)) break;
+    design = sizeWith(task, lean);
+  }
+  return design;
+}
+
+function sizeWith(task: UnitTask, lean: number): Design {
+  const model = boxGirderModel(task, lean);
   const steelOf = boxSteelOf(model);
   const girder = sizeGirder(model, steelOf);
   const steel = steelOf(model, girder.run, girder.effects, girder.plateKg);

@@ -35,10 +35,13 @@ export function tubLayout(task: UnitTask): TubLayout {
   };
 }
 
-/** Webs lean as far as the bottom plate stays wide enough. */
-export function tubShape(layout: TubLayout, heightM: number): TubShape {
+/**
+ * Webs lean as far as the bottom plate stays wide enough, or by a share of that.
+ * @param lean 0 (upright) to 1
+ */
+export function tubShape(layout: TubLayout, heightM: number, lean: number): TubShape {
   const { slope: most, bottomOverTop } = compositeBoxData.web;
   const topM = layout.spacingM;
-  const slope = Math.min(most, ((1 - bottomOverTop) * topM) / (2 * heightM));
+  const slope = lean * Math.min(most, ((1 - bottomOverTop) * topM) / (2 * heightM));
   return { topM, bottomM: topM - 2 * slope * heightM, heightM, slope, slant: Math.hypot(1, slope) };
 }

@@ -9,7 +9,7 @@ import type { FormModule } from '../formModule.ts';
 import { trussData } from './trussData.ts';
 import { trussElevation, trussSectionAt } from './trussDrawing.ts';
 import { temporaryLines, trussLines } from './trussLines.ts';
-import { trussSpan, type TrussSpan } from './trussSpan.ts';
+import { longestTrussM, trussSpan, type TrussSpan } from './trussSpan.ts';
 import type { MemberRole } from './trussGeometry.ts';
 
 /**
@@ -18,7 +18,7 @@ import type { MemberRole } from './trussGeometry.ts';
  * `depthM` of the task is the depth of the floor, soffit of the cross-girders to top of the slab: it is what takes
  * clearance under the road. The height of the trusses themselves goes up and not down, is chosen here for least steel
  * and stands in the figures as `trussHeightM`. Several spans are simple spans in a row.
- * Spans 20 to 250 m.
+ * Spans from 20 m to `mostSpanM`: simple trusses, where the published band of trusses reaches to cantilever trusses.
  */
 export const truss: FormModule = {
   id: 'truss',
@@ -26,6 +26,7 @@ export const truss: FormModule = {
   name: 'Truss',
   pattern: { kind: 'simple-main', approach: 'composite-i' },
   methods: ['crane', 'float-in'],
+  mostSpanM: longestTrussM(),
   size,
 };
 

@@ -144,6 +144,17 @@ function heightsFor(spanM: number, panels: number, hangers: boolean): number[] {
   return heights;
 }
 
+/** Longest span, m in tens, up to which the usual panels, heights and slopes always allow a truss. */
+export function longestTrussM(): number {
+  const canBeLaidOut = (spanM: number): boolean =>
+    panelCounts(spanM).some((panels) =>
+      [false, true].some((hangers) => heightsFor(spanM, panels, hangers).length > 0),
+    );
+  let spanM = 100;
+  while (canBeLaidOut(spanM + 10)) spanM += 10;
+  return spanM;
+}
+
 /** Weight of a traffic load on a span, for telling which plane is worse off. */
 function spanLoad(load: TrafficLoad, spanM: number): number {
   return load.vehicleFactor * 600 + ((load.udlKNm + load.footwayKNm) * spanM) / 2;
