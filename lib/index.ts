@@ -15,6 +15,7 @@ export {
 } from './appraise/parts.ts';
 export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
 export type { PricedAppraisal } from './appraise/appraiseOption.ts';
+export { depthTrials } from './appraise/depthTrials.ts';
 export { formFacts } from './appraise/facts.ts';
 export { memory, type Memory } from './appraise/memory.ts';
 export { workbench, type Workbench } from './appraise/workbench.ts';

@@ -43,7 +43,7 @@ export function checkBars(input: CheckBarsInput): Piece {
     return {
       check,
       governs,
-      lines: wrapText(sentence(check.label), widthPx - figureRoom - 4, letters.table, governs ? 600 : 400),
+      lines: wrapText(sentence(check.label), x(1) - 8, letters.table, governs ? 600 : 400),
     };
   });
   let bottom = 6;

@@ -108,7 +108,7 @@ export function depthCurve(input: DepthCurveInput): Piece {
         label(
           (axis.x(flat[0]) + axis.x(flat[1])) / 2,
           bottom - 12,
-          `within 1 %: ${flat[0].toFixed(1)} to ${flat[1].toFixed(1)} m`,
+          `within 1 %: ${level(flat[0])} to ${level(flat[1])} m`,
           { anchor: 'middle', weight: 600, halo: true },
         ),
       ),

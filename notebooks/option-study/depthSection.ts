@@ -1,13 +1,16 @@
+import { depthCurve, depthTable } from '../charts/depthCurve.ts';
+import { tableBehind } from '../charts/table.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { ladder } from '../drawing/ladder.ts';
 import { fixed, level } from '../format.ts';
 import { h } from '../html.ts';
 import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
+import type { AppraisedOption } from '../model.ts';
 import type { StudyCells } from './studyCells.ts';
 
 /** Section 4: what stands between the deciding obstacle and the road. */
 export function depthSection(page: Sheet, cells: StudyCells): LineSection {
-  const { site, brief, reference } = cells;
+  const { site, brief, books, reference, byDepth } = cells;
   const finding = page.live({ reference }, (v) => {
     const option = v.reference;
     if (!option) return '';
@@ -63,5 +66,53 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
           ),
         ],
     }),
+    page.cell({
+      station: '4+020',
+      title: 'Cost against depth',
+      shows: { reference, byDepth, books },
+      body: (v) => {
+        const own = v.reference;
+        const worked = v.byDepth.filter(({ number }) => number === own?.number);
+        if (!own || worked.length < 3) {
+          return h('p', { class: 'prose' }, 'The published band leaves no other depth to compare with.');
+        }
+        const input = {
+          form: own.form,
+          points: worked.map(({ depthM, cost }) => ({ depthM: depthM.midspan, cost: cost.p50 })),
+          depthM: own.depthM.midspan,
+          limits: depthLimits(worked),
+          currency: v.books.currency,
+          widthPx: 660,
+          prefix: 'cost-depth',
+        };
+        return [depthCurve(input), tableBehind(depthTable(input))];
+      },
+      notes: () => [
+        h(
+          'p',
+          {},
+          'Spans and supports held; at each depth the unit is sized anew, and the road, its fill and the supports follow.',
+        ),
+      ],
+    }),
   ]);
+}
+
+/** Depths at which something ends: the last at which a check fails, the first that lifts the road or fouls a clearance. */
+function depthLimits(rising: readonly AppraisedOption[]): { depthM: number; words: string }[] {
+  const weak = rising.findLast(({ designs }) =>
+    designs.some(({ limitingCheck }) => limitingCheck.utilisation > 1),
+  );
+  const check = weak?.designs
+    .map(({ limitingCheck }) => limitingCheck)
+    .sort((a, b) => b.utilisation - a.utilisation)[0];
+  const lifts = rising.find(({ profile }) => Math.max(profile.startRiseM, profile.endRiseM) > 0.005);
+  const fouls = rising.find(({ headroom }) => headroom !== null && headroom.spareM < -0.005);
+  return [
+    ...(weak && check ? [{ depthM: weak.depthM.midspan, words: `${check.label} is full` }] : []),
+    ...(lifts && lifts !== rising[0]
+      ? [{ depthM: lifts.depthM.midspan, words: 'the road rises from here' }]
+      : []),
+    ...(fouls ? [{ depthM: fouls.depthM.midspan, words: 'fouls a clearance from here' }] : []),
+  ];
 }

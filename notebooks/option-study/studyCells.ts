@@ -1,4 +1,4 @@
-import { appraiseKept, formFacts, guide, memory, survey } from '../../lib/index.ts';
+import { appraiseKept, depthTrials, formFacts, guide, memory, survey } from '../../lib/index.ts';
 import type { Appraisal, AppraisedOption, RegisterEntry, Study } from '../../lib/index.ts';
 import { share, untilDragRests, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
@@ -83,6 +83,20 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     return { ...appraiseKept(v.asked, before, kept), isFrozen: true };
   });
   const reference = graph.cell('reference', { asItStands }, (v) => v.asItStands.option);
+  let depths: readonly AppraisedOption[] = [];
+  /** The reference at depths about its own; those of the study before while a new one is being worked out. */
+  const byDepth = graph.slow(
+    'cost by depth',
+    { options, asked, last },
+    async (v, run): Promise<readonly AppraisedOption[]> => {
+      const option = v.last && referenceIn(v.last.appraisal, v.options.reference);
+      if (!option || v.last.asked !== v.asked) return depths;
+      await untilDragRests(run.signal);
+      depths = await worker.workOut(v.asked, depthTrials(v.asked, option), run);
+      return depths;
+    },
+    { policy: 'latest' },
+  );
   const spanning = graph.cell('spanning', { site }, (v) => {
     const { mainSpanM } = formFacts(v.site);
     if (typeof mainSpanM !== 'number') return null;
@@ -95,5 +109,16 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
         : {}),
     });
   });
-  return { brief, books, site, asked, appraisal, asItStands, reference, spanning, register: () => register };
+  return {
+    brief,
+    books,
+    site,
+    asked,
+    appraisal,
+    asItStands,
+    reference,
+    byDepth,
+    spanning,
+    register: () => register,
+  };
 }

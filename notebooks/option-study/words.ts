@@ -36,9 +36,9 @@ export function answerWords({ options, standing, currency }: Appraisal): HtmlChi
     workedFigure(ofOption(leader, `cost/${point}`), money2(leader.cost[point] / unit.per));
   const spans = spanPaths(leader).filter((path) => path !== undefined);
   const first: HtmlChild = [
-    `${optionTitle(leader)} at `,
+    `Option ${leader.number}, ${titleInside(leader)} at `,
     workedFigure(spans, spansText(spansOf(leader))),
-    ' m come out at ',
+    ' m, comes out at ',
     cost('p50'),
     ` ${unit.label}, between `,
     cost('p10'),
@@ -55,15 +55,19 @@ export function answerWords({ options, standing, currency }: Appraisal): HtmlChi
     const share = standing.odds[leader.number]?.[next.number] ?? Number.NaN;
     return [
       first,
-      ` ${optionTitle(next)} are next; the odds that they are dearer are `,
+      ` Option ${next.number} (${titleInside(next)}) is next; the odds that it is dearer are `,
       workedFigure(`standing/odds/${leader.number}/${next.number}`, odds(share)),
       ' %.',
     ];
   }
-  const said = listed(
-    rivals.map((option) => `option ${option.number} (${optionTitle(option).toLowerCase()})`),
-  );
-  return [first, ` ${said.charAt(0).toUpperCase()}${said.slice(1)} cannot be separated from them on cost.`];
+  const said = listed(rivals.map((option) => `option ${option.number} (${titleInside(option)})`));
+  return [first, ` ${said.charAt(0).toUpperCase()}${said.slice(1)} cannot be separated from it on cost.`];
+}
+
+/** The title of an option inside a sentence. */
+function titleInside(option: AppraisedOption): string {
+  const title = optionTitle(option);
+  return `${title.charAt(0).toLowerCase()}${title.slice(1)}`;
 }
 
 /** What to do first, from what is not known yet. */

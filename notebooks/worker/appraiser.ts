@@ -1,5 +1,5 @@
 import { conclude, formsAsked, optionsOf } from '../../lib/index.ts';
-import type { Appraisal, FormId, Study } from '../../lib/index.ts';
+import type { Appraisal, AppraisedOption, FormId, Option, Study } from '../../lib/index.ts';
 import type { Progress, SlowRun } from '../reactive/index.ts';
 import { client, type Client } from './client.ts';
 import type { jobs } from './jobs.ts';
@@ -8,6 +8,12 @@ import type { jobs } from './jobs.ts';
 export interface Appraiser {
   /** The appraisal of a study; can be aborted, tells how far it has come. Fits the run of a slow cell. */
   readonly appraise: (study: Study, run?: Partial<SlowRun>) => Promise<Appraisal>;
+  /** Options of a study as they are given, worked out and priced, in their order. */
+  readonly workOut: (
+    study: Study,
+    options: readonly Option[],
+    run?: Partial<SlowRun>,
+  ) => Promise<AppraisedOption[]>;
   /** Ends the workers; what they were working on rejects. */
   readonly end: () => void;
 }
@@ -93,6 +99,10 @@ export function appraiser(): Appraiser {
   });
   return {
     appraise: appraiseWith(started.map(({ line }) => line)),
+    async workOut(study, options, run) {
+      const priced = await started[0]!.line.call('workOut', { study, options }, run);
+      return priced.map(({ option }) => option);
+    },
     end() {
       for (const { worker, line } of started) {
         worker.terminate();

@@ -41,7 +41,7 @@ describe('option study', () => {
     const { page, heard } = await site.open('option-study.html');
     await settled(page);
     expect(await page.locator('h1').textContent()).toBe('River Wend crossing at Low Ferry');
-    expect(await page.locator('.answer').textContent()).toMatch(/come out at .* M€, between/u);
+    expect(await page.locator('.answer').textContent()).toMatch(/comes out at .* M€, between/u);
     const drawn = await page.locator('#\\33 \\+020 [data-option]').count();
     expect(drawn).toBeGreaterThanOrEqual(4);
     expect(await ranking(page)).toHaveLength(drawn);

@@ -1,0 +1,31 @@
+import type { AppraisedOption, Option, Study } from '../model/index.ts';
+import { survey } from '../site/index.ts';
+import { depthRange } from './depthRange.ts';
+import { mainUnit, spansOf } from './workOption.ts';
+
+/** Depths shown on either side of the one an option has. */
+const EACH_SIDE = 4;
+/** From one of them to the next. */
+const STRIDE = 1.09;
+/** Depths are drawn to 50 mm: 20 steps to the metre. */
+const STEPS = 20;
+
+/**
+ * An option at its own depth of the main unit, m, and at depths about it inside the published band, rising: worked out,
+ * they show what depth does to the cost of the whole crossing. Never fewer than the option itself.
+ */
+export function depthTrials(study: Study, worked: AppraisedOption): readonly Option[] {
+  const { number, form, method, units, designs } = worked;
+  const main = mainUnit(units);
+  const ownM = designs[units.indexOf(main)]!.task.depthM;
+  const [least, most] = depthRange(form, method, spansOf(main), survey(study.brief).deck);
+  const depths = new Set([ownM]);
+  for (let k = -EACH_SIDE; k <= EACH_SIDE; k++) {
+    const depthM = Math.round(ownM * STRIDE ** k * STEPS) / STEPS;
+    const isOwn = Math.abs(depthM - ownM) < 0.5 / STEPS;
+    if (!isOwn && depthM >= least && depthM <= most) depths.add(depthM);
+  }
+  return [...depths]
+    .sort((a, b) => a - b)
+    .map((depthM) => ({ number, form, method, units, depthM, origin: 'kept' }));
+}
