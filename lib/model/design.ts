@@ -15,10 +15,21 @@ export interface UnitTask {
   readonly depthM: number;
   /** Number of girders, where the form lets it be chosen. */
   readonly girders?: number;
+  /** Composite I-girders on continuous spans: deeper over the inner supports; constant depth when absent. */
+  readonly haunch?: Haunch;
+  /** Composite I-girders: beams between the girders, carried by the cross-frames, so that the slab spans half the spacing. */
+  readonly substringers?: boolean;
   /** Cable-stayed: which supports (0-based) carry pylons. */
   readonly pylons?: readonly number[];
   /** Height of the road above ground at each support, m, where known (pylon legs, falsework). */
   readonly clearUnderM?: readonly number[];
+}
+
+/** Depth law of haunched girders. */
+export interface Haunch {
+  /** Structural depth over inner supports, m. */
+  readonly pierDepthM: number;
+  readonly law: 'parabolic' | 'straight';
 }
 
 /** Structural depth of a unit, m: soffit to top of structural slab or plate. */

@@ -133,9 +133,9 @@ function edgeShape(edge: EdgeCase, slabM: number, widthM: number): EdgeShape {
   const topOf = (n: number): GirderTop => ({
     slabAreaM2: (edge.slabWidthM * slabM) / n,
     slabInertiaM4: (edge.slabWidthM * slabM ** 3) / 12 / n,
-    slabAxisM: girderM + slabM / 2,
+    slabAboveM: slabM / 2,
     barAreaM2: 0,
-    barAxisM: 0,
+    barAboveM: 0,
   });
   return {
     standard,

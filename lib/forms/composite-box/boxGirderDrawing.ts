@@ -35,7 +35,7 @@ function tubAt(model: BoxGirderModel, run: PlateRun, element: number, y: number)
   const { shape, slab, field } = model;
   const { topM, bottomM, webM, topWidthM } = platesAt(run, element);
   const top = -slab.rootM;
-  const soffit = top - run.heightM;
+  const soffit = top - model.girderM;
   const plate = (part: string, points: readonly Point[], faint = false): Shape => ({
     part,
     material: 'steel',

@@ -20,7 +20,7 @@ export function boxGirderLines(model: BoxGirderModel, girder: SizedGirder, steel
     measured('deck', 'plate-girder-steel', mass, what, how);
   const along = (area: (e: number) => number): number =>
     elementM.reduce((sum, length, e) => sum + area(e) * length, 0);
-  const webM = (e: number): number => run.heightM - run.topM[e]! - run.bottomM[e]!;
+  const webM = (e: number): number => model.girderM - run.topM[e]! - run.bottomM[e]!;
   const boxes = `${tubs.boxes} ${tubs.boxes === 1 ? 'box' : 'boxes'}`;
   const plates = (thicknessM: Float64Array): string =>
     `${boxes}, ${runsOf(thicknessM).length} thicknesses along the unit, ${density} kg/m3`;

@@ -58,7 +58,7 @@ export function boxSteelOf(box: BoxGirderModel) {
       );
     let leanKg = 0;
     run.webM.forEach((webM, e) => {
-      const heightM = run.heightM - run.topM[e]! - run.bottomM[e]!;
+      const heightM = model.girderM - run.topM[e]! - run.bottomM[e]!;
       leanKg += tubs.count * density * webM * heightM * (shape.slant - 1) * model.elementM[e]!;
     });
     const studs = tubs.count * studsOnGirder(model, run, effects);
@@ -76,6 +76,7 @@ export function boxSteelOf(box: BoxGirderModel) {
       spanRibs,
       frames,
       crossKg,
+      substringersKg: 0,
       stiffenersKg: ribsKg,
       bearingStiffenersKg,
       studsKg,

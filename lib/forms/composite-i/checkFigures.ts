@@ -109,6 +109,12 @@ export const compositeChecks: readonly Descriptor[] = [
     yieldOf('midspanBottomFlangeM'),
   ),
   ...check(
+    'substringers',
+    ['highest share used of casting, bending, shear, fatigue and stiffness', 'substringerKgM'],
+    ['1 by definition'],
+    'EN 1993-1-1, EN 1993-1-9, EN 1994-2 (from memory)',
+  ),
+  ...check(
     'girder-depth',
     ['least height of a plate girder', 'data/composite-i/leastGirderM'],
     ['structural depth - slab over the girder', './task/depthM', 'slabAtGirderM'],

@@ -29,7 +29,24 @@ const schema = z.object({
     source,
   }),
   outstandSlenderness: cited,
-  web: z.object({ leastMm: citedByStandard, mostHeightOverThickness: cited, mostMm: cited }),
+  web: z.object({
+    leastMm: citedByStandard,
+    mostHeightOverThickness: cited,
+    mostMm: cited,
+    along: z.object({
+      fromM: number,
+      mostHeightOverThickness: number,
+      fromFlangeOverHeight: number,
+      widthOverHeight: number,
+      slenderness: number,
+      source,
+    }),
+  }),
+  haunch: z.object({
+    parabolic: z.object({ over: number, power: number }),
+    straight: z.object({ over: number, power: number }),
+    source,
+  }),
   plateChangeKg: cited,
   leastPlateLengthM: cited,
   bracing: z.object({ mostM: number, mostOverFlangeWidthAtPiers: number, source }),
@@ -82,6 +99,7 @@ const schema = z.object({
     channelKgPerM: number,
     source,
   }),
+  substringers: z.object({ frameDepthOverGirder: number, strutShare: number, source }),
   stiffeners: z.object({
     widthBaseM: number,
     widthPerHeight: number,

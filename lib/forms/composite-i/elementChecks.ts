@@ -14,6 +14,7 @@ import {
   type GirderPlates,
   type GirderTop,
 } from './girderSection.ts';
+import { hasAlong } from './webStiffener.ts';
 import type { GirderModel } from './girderModel.ts';
 import type { StageMoments } from './stageMoments.ts';
 
@@ -52,6 +53,8 @@ const steel: GirderFigures = { areaM2: 0, centroidM: 0, inertiaM4: 0 };
 const lasting: GirderFigures = { areaM2: 0, centroidM: 0, inertiaM4: 0 };
 const short: GirderFigures = { areaM2: 0, centroidM: 0, inertiaM4: 0 };
 const cracked: GirderFigures = { areaM2: 0, centroidM: 0, inertiaM4: 0 };
+/** Plates of the element, as high as at the end that is looked at. */
+const here = { heightM: 0, topWidthM: 0, topM: 0, bottomWidthM: 0, bottomM: 0, webM: 0 };
 
 /**
  * Elastic stresses summed over the stages at the two ends of element `e` (EN 1994-2 6.2.1.5, AASHTO LRFD 6.10.1.1.1),
@@ -69,20 +72,18 @@ export function elementChecks(
   equivalentKNm: Float64Array,
   fatigueMPa: number,
 ): ElementUse {
-  const { heightM: h, topM: tt, bottomM: tb } = plates;
-  const zTop = h - tt / 2;
+  const { topM: tt, bottomM: tb } = plates;
   const zBottom = tb / 2;
   const fyTop = model.yieldMPa(tt);
   const fyBottom = model.yieldMPa(tb);
   const { steel: gammaM0, steelBuckling: gammaM1 } = model.standard.resistance;
   const top = model.cracked[e]!;
-  girderFigures(steel, plates, bareGirder);
-  girderFigures(lasting, plates, model.lasting[e]);
-  girderFigures(short, plates, model.short[e]);
-  girderFigures(cracked, plates, top);
+  Object.assign(here, plates);
+  stageFigures(model, e);
   const bracingM = model.bracingM[e]!;
   const favourable = model.standard.factors.uls.permanentFavourable / model.standard.factors.uls.permanent;
-  const shrinkTension = shrinkageAtBottom(model, e, zBottom);
+  let zTop = plates.heightM - tt / 2;
+  let shrinkTension = shrinkageAtBottom(model, e, zBottom);
   const inCracked = model.isCracked[e] === 1;
 
   use.castTop = use.sagTop = use.sagBottom = use.hogTop = use.hogBottom = use.service = 0;
@@ -90,6 +91,13 @@ export function elementChecks(
   let lost = false;
   for (let end = 0; end < 2; end++) {
     const i = e + end;
+    if (model.heights.haunched) {
+      here.heightM = model.heights.atStationM[i]!;
+      zTop = here.heightM - tt / 2;
+      stageFigures(model, e);
+      shrinkTension = shrinkageAtBottom(model, e, zBottom);
+      lost = false;
+    }
     const cast = (m.cast[i]! * (zTop - steel.centroidM)) / steel.inertiaM4 / 1e3;
     if (cast > 0) {
       const chi = strutReduction(plates.topWidthM, tt, plates.webM, zTop - steel.centroidM, bracingM, fyTop);
@@ -120,7 +128,7 @@ export function elementChecks(
       let tension = fibre(steelHog, steel, zTop) + fibre(onBars, cracked, zTop);
       if (bottom < 0 && !lost) {
         lost = true;
-        if (reduceWeb(model, plates, top, bottom, tension)) {
+        if (reduceWeb(model, here, top, bottom, tension)) {
           bottom = fibre(steelHog, steel, zBottom) + fibre(onBars, cracked, zBottom);
           tension = fibre(steelHog, steel, zTop) + fibre(onBars, cracked, zTop);
         }
@@ -155,6 +163,14 @@ export function elementChecks(
   return use;
 }
 
+/** Sections of the plates `here` in every stage. */
+function stageFigures(model: GirderModel, e: number): void {
+  girderFigures(steel, here, bareGirder);
+  girderFigures(lasting, here, model.lasting[e]);
+  girderFigures(short, here, model.short[e]);
+  girderFigures(cracked, here, model.cracked[e]);
+}
+
 /** Stress at height z, MPa, tension positive below the centroid under sagging. */
 function fibre(momentKNm: number, section: GirderFigures, z: number): number {
   return (momentKNm * (section.centroidM - z)) / section.inertiaM4 / 1e3;
@@ -187,14 +203,18 @@ function strutReduction(
 function shrinkageAtBottom(model: GirderModel, e: number, zBottom: number): number {
   const force = model.shrinkageKN[e]!;
   if (!(force > 0)) return 0;
-  const arm = model.lasting[e]!.slabAxisM - lasting.centroidM;
+  const arm = here.heightM + model.lasting[e]!.slabAboveM - lasting.centroidM;
   return (
     Math.max(0, (force * arm * (lasting.centroidM - zBottom)) / lasting.inertiaM4 - force / lasting.areaM2) /
     1e3
   );
 }
 
-/** Takes the buckled strip of the web out of the steel and cracked sections; false when nothing buckles. */
+/**
+ * Takes what buckles of the web out of the steel and cracked sections; false when nothing does. A stiffener along a deep
+ * web makes two panels of it: one beside the flange, one to the neutral axis whose edge is less pressed
+ * (EN 1993-1-5 4.4(4), from memory).
+ */
 function reduceWeb(
   model: GirderModel,
   plates: GirderPlates,
@@ -205,12 +225,32 @@ function reduceWeb(
   const webHeight = plates.heightM - plates.topM - plates.bottomM;
   const psi = Math.max(-3, -Math.max(0, topMPa) / -bottomMPa);
   const fy = model.yieldMPa(plates.webM);
-  const lambda = plateSlenderness(webHeight / plates.webM, fy, internalPlateFactor(psi));
-  const ratio = effectiveWidthRatio(lambda, psi);
-  if (ratio >= 1) return false;
   const compressed = webHeight / (1 - psi);
-  const gap = (1 - ratio) * compressed;
-  const axis = plates.bottomM + 0.4 * ratio * compressed + gap / 2;
+  const share = (panelM: number, ratio: number, edge: number): number =>
+    effectiveWidthRatio(
+      plateSlenderness(panelM / plates.webM, fy, internalPlateFactor(ratio)) * Math.sqrt(edge),
+      ratio,
+    );
+  let gap: number;
+  let axis: number;
+  const stiffenerM = hasAlong(model, webHeight)
+    ? compositeData.web.along.fromFlangeOverHeight * webHeight
+    : 0;
+  if (stiffenerM > 0 && stiffenerM < compressed) {
+    const edge = 1 - stiffenerM / compressed;
+    const low = (1 - share(stiffenerM, edge, 1)) * stiffenerM;
+    const rest = compressed - stiffenerM;
+    const high = (1 - share(webHeight - stiffenerM, Math.max(-3, psi / edge), edge)) * rest;
+    gap = low + high;
+    if (!(gap > 0)) return false;
+    axis =
+      plates.bottomM + ((low * stiffenerM) / 2 + high * (stiffenerM + 0.4 * (rest - high) + high / 2)) / gap;
+  } else {
+    const ratio = share(webHeight, psi, 1);
+    if (ratio >= 1) return false;
+    gap = (1 - ratio) * compressed;
+    axis = plates.bottomM + 0.4 * ratio * compressed + gap / 2;
+  }
   girderFigures(steel, plates, bareGirder, gap * plates.webM, axis, gap);
   girderFigures(cracked, plates, top, gap * plates.webM, axis, gap);
   return true;

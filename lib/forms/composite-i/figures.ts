@@ -9,7 +9,14 @@ const { figure, sized, line } = manual;
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 const plates = ['webs', 'top flanges', 'bottom flanges'] as const;
-const otherSteel = ['cross-girders', 'bracing', 'stiffeners', 'shear studs', 'welds and bolts'] as const;
+const otherSteel = [
+  'cross-girders',
+  'bracing',
+  'substringers',
+  'stiffeners',
+  'shear studs',
+  'welds and bolts',
+] as const;
 const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/widthM` }) as const;
 
 const midPlates = (at: At) =>
@@ -57,6 +64,24 @@ export const compositeFigures: readonly Descriptor[] = [
     }),
     compute: ({ depth, slab, least }) => Math.max(least, depth - slab),
   }),
+  sized(
+    'pierGirderHeightM',
+    'height of the girder over its piers',
+    'm',
+    'pier depth asked for - slab over the girder',
+    'slabAtGirderM',
+    './depthM/support',
+  ),
+  sized(
+    'substringerKgM',
+    'mass of a substringer',
+    'kg/m',
+    'lightest composite beam between cross-frames that passes casting, bending, shear, fatigue and stiffness',
+    'spacingM',
+    'slabAtGirderM',
+    'data/composite-i/bracing/mostM',
+    'data/floor/stringerDepthOverSpan',
+  ),
   sized(
     'slabMeanM',
     'mean thickness of the slab',

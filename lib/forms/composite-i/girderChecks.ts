@@ -13,6 +13,7 @@ import { platesAt } from './plateRun.ts';
 import { midStations, type SizedGirder } from './sizeGirder.ts';
 import { webCapacityKN } from './sizePlates.ts';
 import { totalHog } from './stageMoments.ts';
+import { mostWebSlenderness } from './webStiffener.ts';
 
 /** All limit states of a sized girder and of its slab; labels as they are printed. */
 export function girderChecks(model: GirderModel, girder: SizedGirder): Check[] {
@@ -22,6 +23,10 @@ export function girderChecks(model: GirderModel, girder: SizedGirder): Check[] {
   const roomM = model.task.depthM - model.slab.rootM;
   if (roomM < least)
     checks.push(check('girder-depth', 'height left for the girder under the slab', least, roomM, 'm'));
+  if (model.substringers) {
+    const { beam } = model.substringers;
+    checks.push(check('substringers', `substringers, ${beam.governs}`, beam.utilisation, 1, '1'));
+  }
   return [...checks, ...model.slab.checks];
 }
 
@@ -83,8 +88,13 @@ function webChecks(model: GirderModel, girder: SizedGirder): Check[] {
     capacity = resistance;
   }
   const checks = [check('shear', 'shear of the webs', demand, capacity, 'kN')];
-  const slender = Math.max(...run.webM.map((t, e) => (model.girderM - run.topM[e]! - run.bottomM[e]!) / t));
-  const most = compositeData.web.mostHeightOverThickness.value;
+  let slender = 0;
+  let most = 1;
+  run.webM.forEach((t, e) => {
+    const heightM = run.heightM[e]! - run.topM[e]! - run.bottomM[e]!;
+    const allowed = mostWebSlenderness(model, heightM);
+    if (heightM / t / allowed > slender / most) [slender, most] = [heightM / t, allowed];
+  });
   // Webs are sized to this limit: it is news only where the thickest web does not reach it.
   if (slender > most * 1.0001)
     checks.push(check('web-slenderness', 'web height over thickness', slender, most, '1'));
@@ -93,7 +103,7 @@ function webChecks(model: GirderModel, girder: SizedGirder): Check[] {
     const station = j * elementsPerSpan;
     for (const e of [station - 1, station]) {
       const share = shearKN[e]! / capacityAt(model, girder, e);
-      const { whole, flanges } = plasticAtPier(model, run, e);
+      const { whole, flanges } = plasticAtPier(model, run, e, model.heights.atStationM[station]!);
       const bending = -totalHog(girder.moments, station) / whole;
       together = Math.max(
         together,
@@ -108,7 +118,7 @@ function webChecks(model: GirderModel, girder: SizedGirder): Check[] {
 
 function capacityAt(model: GirderModel, girder: SizedGirder, e: number): number {
   const { run } = girder;
-  return webCapacityKN(model, e, run.webM[e]!, model.girderM - run.topM[e]! - run.bottomM[e]!);
+  return webCapacityKN(model, e, run.webM[e]!, run.heightM[e]! - run.topM[e]! - run.bottomM[e]!);
 }
 
 /** Plastic moments of steel and bars in hogging: the whole section, and without the web. */
@@ -116,15 +126,16 @@ function plasticAtPier(
   model: GirderModel,
   run: SizedGirder['run'],
   e: number,
+  heightM: number,
 ): { whole: number; flanges: number } {
-  const { topM, bottomM, webM, heightM, topWidthM, bottomWidthM } = platesAt(run, e);
+  const { topM, bottomM, webM, topWidthM, bottomWidthM } = platesAt(run, e);
   const top = model.cracked[e]!;
   const barM = 0.02;
   const bars: PlasticPart = {
     kind: 'rect',
     widthM: top.barAreaM2 / barM,
     heightM: barM,
-    bottomM: top.barAxisM - barM / 2,
+    bottomM: heightM + top.barAboveM - barM / 2,
     fyMPa: barDesignMPa(model.standardId),
   };
   const gamma = model.standard.resistance.steel;

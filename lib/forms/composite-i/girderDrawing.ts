@@ -1,7 +1,8 @@
 import type { SectionCut, Shape } from '../../model/index.ts';
-import { constantDepth, type DepthAlong } from '../common/depthAlong.ts';
+import { constantDepth, depthAt, type DepthAlong } from '../common/depthAlong.ts';
 import { deckFace, soffitLine, upright } from '../common/elevation.ts';
 import { deckFurniture } from '../common/furniture.ts';
+import { girderShape } from '../floor/floorShapes.ts';
 import { elementsPerSpan } from './elementsPerSpan.ts';
 import type { GirderModel } from './girderModel.ts';
 import { platesAt, runsOf, type PlateRun } from './plateRun.ts';
@@ -10,7 +11,7 @@ type Point = readonly [x: number, z: number];
 
 /** The unit from the side: slab, girder face, bottom flange by plate thickness, bracing and plate joints faint. */
 export function girderElevation(model: GirderModel, run: PlateRun): Shape[] {
-  const soffit = constantDepth(model.lengthM, model.girderM + model.slab.rootM);
+  const soffit = girderDepthAlong(model);
   const slab = constantDepth(model.lengthM, model.slab.rootM);
   const shapes: Shape[] = [
     deckFace('slab', 'concrete', slab),
@@ -33,9 +34,25 @@ export function girderElevation(model: GirderModel, run: PlateRun): Shape[] {
   return shapes;
 }
 
+/** Structural depth along the unit: two points where it is constant, every station where it is haunched. */
+export function girderDepthAlong(model: GirderModel): DepthAlong {
+  const { haunched, atStationM } = model.heights;
+  if (!haunched) return constantDepth(model.lengthM, model.girderM + model.slab.rootM);
+  let x = 0;
+  return {
+    xM: [0, ...Array.from(model.elementM, (lengthM) => (x += lengthM))],
+    depthM: Array.from(atStationM, (heightM) => heightM + model.slab.rootM),
+  };
+}
+
 function stretch(along: DepthAlong, fromM: number, toM: number): DepthAlong {
-  const [depthM = 0] = along.depthM;
-  return { xM: [fromM, toM], depthM: [depthM, depthM] };
+  const between = along.xM.flatMap((x, i) =>
+    x > fromM + 1e-6 && x < toM - 1e-6 ? [[x, along.depthM[i]!] as const] : [],
+  );
+  return {
+    xM: [fromM, ...between.map(([x]) => x), toM],
+    depthM: [depthAt(along, fromM), ...between.map(([, depthM]) => depthM), depthAt(along, toM)],
+  };
 }
 
 /** Cross-sections at the middle of the longest span and, on continuous units, over an inner support beside it. */
@@ -64,7 +81,12 @@ function cut(
   const shapes: Shape[] = [];
   const { offsetsM } = model.layout;
   if (crossGirderM > 0) shapes.push(crossGirder(model, run, crossGirderM));
-  for (const y of offsetsM) shapes.push(...girderAt(model, run, element, y));
+  const heightM = model.heights.atStationM[element]!;
+  for (const y of offsetsM) shapes.push(...girderAt(model, run, element, heightM, y));
+  const { substringers, layout, slab } = model;
+  if (substringers)
+    for (const y of layout.offsetsM.slice(1))
+      shapes.push(girderShape('substringer', y - layout.spacingM / 2, -slab.rootM, substringers.beam.plates));
   shapes.push({
     part: 'slab',
     material: 'concrete',
@@ -76,10 +98,10 @@ function cut(
 }
 
 /** The three plates of one girder as rectangles. */
-function girderAt(model: GirderModel, run: PlateRun, element: number, y: number): Shape[] {
+function girderAt(model: GirderModel, run: PlateRun, element: number, heightM: number, y: number): Shape[] {
   const { topM, bottomM, webM, topWidthM, bottomWidthM } = platesAt(run, element);
   const top = -model.slab.rootM;
-  const soffit = top - model.girderM;
+  const soffit = top - heightM;
   const plate = (part: string, widthM: number, from: number, to: number): Shape => ({
     part,
     material: 'steel',

@@ -93,15 +93,14 @@ function curvatures(model: GirderModel, run: PlateRun): { shrinkage: Float64Arra
   const elements = model.elementM.length;
   const shrinkage = new Float64Array(elements + 1);
   const warmth = new Float64Array(elements + 1);
-  const depthM = model.girderM + model.slab.rootM;
-  const perKelvin = compositeData.temperature.expansion1PerK / depthM;
   for (let e = 0; e < elements; e++) {
+    const perKelvin = compositeData.temperature.expansion1PerK / (run.heightM[e]! + model.slab.rootM);
     const force = model.shrinkageKN[e]!;
     let curvature = 0;
     if (force > 0) {
       const top = model.lasting[e]!;
       const { centroidM, inertiaM4 } = girderFigures(figures, platesAt(run, e), top);
-      curvature = (force * (top.slabAxisM - centroidM)) / (model.modulusKNm2 * inertiaM4);
+      curvature = (force * (run.heightM[e]! + top.slabAboveM - centroidM)) / (model.modulusKNm2 * inertiaM4);
     }
     for (const i of [e, e + 1]) {
       const weight = i === 0 || i === elements ? 1 : 0.5;

@@ -13,7 +13,7 @@ export interface GirderLayout {
 
 /**
  * Girder lines of a deck: two with cross-girders up to `twin.mostWidthM`, more beyond; `task.girders` overrides.
- * @throws RangeError when fewer than two girders or part of a girder are asked for.
+ * @throws RangeError when fewer than two girders or part of a girder are asked for, or substringers between two.
  */
 export function girderLayout(task: UnitTask): GirderLayout {
   const { widthM } = task.deck;
@@ -25,6 +25,10 @@ export function girderLayout(task: UnitTask): GirderLayout {
     );
   const many = Math.max(3, Math.ceil(widthM / multi.mostSpacingM - 2 * multi.overhangOverSpacing - 1e-9) + 1);
   const count = asked ?? (widthM <= twin.mostWidthM ? 2 : many);
+  if (task.substringers && count < 3)
+    throw new RangeError(
+      `substringers: expected three girders or more, received ${count}; ask for more girders or leave them out`,
+    );
   const ratio = count === 2 ? twin.overhangOverSpacing : multi.overhangOverSpacing;
   const spacingM = widthM / (count - 1 + 2 * ratio);
   const overhangM = (widthM - (count - 1) * spacingM) / 2;

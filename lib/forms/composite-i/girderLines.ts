@@ -18,7 +18,7 @@ export function girderLines(model: GirderModel, girder: SizedGirder): MeasuredLi
     measured('deck', 'plate-girder-steel', kg, what, how);
   const plates = (thicknessM: Float64Array, widthM: (e: number) => number): number =>
     layout.count * thicknessM.reduce((sum, t, e) => sum + density * t * widthM(e) * model.elementM[e]!, 0);
-  const webHeight = (e: number): number => model.girderM - run.topM[e]! - run.bottomM[e]!;
+  const webHeight = (e: number): number => run.heightM[e]! - run.topM[e]! - run.bottomM[e]!;
   const steps = (thicknessM: Float64Array): string =>
     `${girders}, ${runsOf(thicknessM).length} plates each, ${density} kg/m3`;
   const inner = model.braceAtM.length - model.supportsM.length;
@@ -44,6 +44,15 @@ export function girderLines(model: GirderModel, girder: SizedGirder): MeasuredLi
       `${steps(run.bottomM)}, ${mm(run.bottomWidthM)} mm wide`,
     ),
     steel(secondary.crossKg, layout.twin ? 'cross-girders' : 'bracing', crosses),
+    ...(model.substringers
+      ? [
+          steel(
+            secondary.substringersKg,
+            'substringers',
+            `${model.substringers.lines} lines, ${model.substringers.beam.massKgPerM.toFixed(0)} kg/m`,
+          ),
+        ]
+      : []),
     steel(
       secondary.stiffenersKg + secondary.bearingStiffenersKg,
       'stiffeners',
@@ -102,12 +111,15 @@ function paintedM2(model: GirderModel, girder: SizedGirder): number {
   const { run, secondary } = girder;
   let perGirder = 0;
   for (let e = 0; e < model.elementM.length; e++) {
-    const web = 2 * (model.girderM - run.topM[e]! - run.bottomM[e]!);
+    const web = 2 * (run.heightM[e]! - run.topM[e]! - run.bottomM[e]!);
     const flanges = 2 * run.bottomWidthM + 2 * run.bottomM[e]! + run.topWidthM + 2 * run.topM[e]!;
     perGirder += (web + flanges - 2 * run.webM[e]!) * model.elementM[e]!;
   }
+  const stringersM2 = model.substringers
+    ? model.substringers.lines * model.substringers.beam.paintM2PerM * model.lengthM
+    : 0;
   const secondaryT = (secondary.crossKg + secondary.stiffenersKg + secondary.bearingStiffenersKg) / 1000;
-  return model.layout.count * perGirder + compositeData.secondaryPaintM2PerT.value * secondaryT;
+  return model.layout.count * perGirder + stringersM2 + compositeData.secondaryPaintM2PerT.value * secondaryT;
 }
 
 function mm(lengthM: number): string {

@@ -17,9 +17,11 @@ import { supportPositions } from '../common/supports.ts';
 import { bays, braces } from './bracing.ts';
 import { compositeData } from './compositeData.ts';
 import { elementsPerSpan } from './elementsPerSpan.ts';
+import { girderHeights, type GirderHeights } from './girderHeights.ts';
 import { girderLayout, type GirderLayout } from './girderLayout.ts';
 import type { GirderTop } from './girderSection.ts';
 import { girderTops } from './girderTops.ts';
+import { substringers, type Substringers } from './substringers.ts';
 
 /** Everything about one girder that does not change while its plates are sought. */
 export interface GirderModel {
@@ -32,8 +34,9 @@ export interface GirderModel {
   readonly lengthM: number;
   /** Length of each element, m. */
   readonly elementM: Float64Array;
-  /** Girder height over both flanges, m. */
+  /** Girder height over both flanges where there is no haunch, m; along the girder see `heights`. */
   readonly girderM: number;
+  readonly heights: GirderHeights;
   /** Ratio of moduli for short loads. */
   readonly modularRatio: number;
   /** What acts above the steel girder, by element: short loads, lasting loads, slab cracked (bars only). */
@@ -59,7 +62,8 @@ export interface GirderModel {
   readonly shrinkageKN: Float64Array;
   /** Modulus of the steel, kN/m2. */
   readonly modulusKNm2: number;
-  yieldMPa(thicknessM: number): number;
+  readonly yieldMPa: (thicknessM: number) => number;
+  readonly substringers?: Substringers;
   /** Where the girder is half of a box: its half of the bottom plate. */
   readonly plate?: BottomPlate;
 }
@@ -111,7 +115,7 @@ export function modelOn(
     standard: task.standard,
     deck: task.deck,
     direction: 'across',
-    spacingM: layout.spacingM,
+    spacingM: task.substringers ? layout.spacingM / 2 : layout.spacingM,
     overhangM: layout.overhangM,
     continuous: stiff,
     uniform: even,
@@ -126,7 +130,7 @@ export function modelOn(
   const modulusMPa = materials.steel[grade].eMPa;
   const modularRatio =
     modulusMPa / concrete(task.standard, materials.concreteDefaultMPa[task.standard].slab).ecmMPa;
-  const tops = girderTops(task, layout, slab, girderM, modularRatio, modulusMPa);
+  const tops = girderTops(task, layout, slab, modularRatio, modulusMPa);
   const share = task.deck.widthM / layout.count;
   const traffic = trafficOn(slab, girderM, modularRatio);
   const slabKNm = curve * standard.unitWeights.concreteKNm3 * slab.meanM * share;
@@ -139,6 +143,7 @@ export function modelOn(
     (compositeData.flange.widthOverThickness * peakKNm) / (girderM * yieldMPa(0.05) * 1e3),
   );
   const braceAtM = braces(task, supportsM, Math.max(compositeData.flange.leastWidthM, flangeM));
+  const bracingM = bays(elementM, braceAtM);
   return {
     task,
     standardId: task.standard,
@@ -149,10 +154,11 @@ export function modelOn(
     lengthM: supportsM[supportsM.length - 1]!,
     elementM,
     girderM,
+    heights: girderHeights(task, supportsM, girderM, slab.rootM),
     modularRatio,
     ...tops,
     braceAtM,
-    bracingM: bays(elementM, braceAtM),
+    bracingM,
     guessKNm,
     slabKNm,
     curve,
@@ -161,6 +167,9 @@ export function modelOn(
     traffic,
     modulusKNm2: modulusMPa * 1e3,
     yieldMPa,
+    ...(task.substringers
+      ? { substringers: substringers(task, standard, layout, slab, Math.max(...bracingM), yieldMPa) }
+      : {}),
   };
 }
 

@@ -36,6 +36,8 @@ export function girderFiguresOf(model: GirderModel, girder: SizedGirder): Record
     girders: model.layout.count,
     spacingM: model.layout.spacingM,
     girderHeightM: model.girderM,
+    ...(model.heights.haunched ? { pierGirderHeightM: Math.max(...model.heights.atStationM) } : {}),
+    ...(model.substringers ? { substringerKgM: model.substringers.beam.massKgPerM } : {}),
     slabMeanM: model.slab.meanM,
     slabAtGirderM: model.slab.rootM,
     modularRatio: model.modularRatio,

@@ -8,24 +8,24 @@ export interface GirderPlates {
   readonly webM: number;
 }
 
-/** What stands above the girder and acts with it. Heights are above the soffit, m. */
+/** What stands above the girder and acts with it. Heights are above the top of the girder, m. */
 export interface GirderTop {
   /** Slab area and own inertia that act with one girder, already divided by the ratio of moduli. */
   readonly slabAreaM2: number;
   readonly slabInertiaM4: number;
-  readonly slabAxisM: number;
+  readonly slabAboveM: number;
   /** Bars that act with the girder where the slab is cracked; 0 where it is not. */
   readonly barAreaM2: number;
-  readonly barAxisM: number;
+  readonly barAboveM: number;
 }
 
 /** No slab and no bars: the steel girder alone. */
 export const bareGirder: GirderTop = {
   slabAreaM2: 0,
   slabInertiaM4: 0,
-  slabAxisM: 0,
+  slabAboveM: 0,
   barAreaM2: 0,
-  barAxisM: 0,
+  barAboveM: 0,
 };
 
 /** Area m2, centroid above the soffit m, inertia about it m4. Reused: `girderFigures` writes into it. */
@@ -55,13 +55,15 @@ export function girderFigures(
   const webArea = webHeight * tw;
   const topAxis = h - tt / 2;
   const webAxis = tb + webHeight / 2;
+  const slabAxis = h + top.slabAboveM;
+  const barAxis = h + top.barAboveM;
   const area = topArea + bottomArea + webArea + top.slabAreaM2 + top.barAreaM2 - lostAreaM2;
   const first =
     topArea * topAxis +
     (bottomArea * tb) / 2 +
     webArea * webAxis +
-    top.slabAreaM2 * top.slabAxisM +
-    top.barAreaM2 * top.barAxisM -
+    top.slabAreaM2 * slabAxis +
+    top.barAreaM2 * barAxis -
     lostAreaM2 * lostAxisM;
   const z = first / area;
   out.areaM2 = area;
@@ -70,9 +72,9 @@ export function girderFigures(
     topArea * ((topAxis - z) ** 2 + (tt * tt) / 12) +
     bottomArea * ((tb / 2 - z) ** 2 + (tb * tb) / 12) +
     webArea * ((webAxis - z) ** 2 + (webHeight * webHeight) / 12) +
-    top.slabAreaM2 * (top.slabAxisM - z) ** 2 +
+    top.slabAreaM2 * (slabAxis - z) ** 2 +
     top.slabInertiaM4 +
-    top.barAreaM2 * (top.barAxisM - z) ** 2 -
+    top.barAreaM2 * (barAxis - z) ** 2 -
     lostAreaM2 * ((lostAxisM - z) ** 2 + (lostHeightM * lostHeightM) / 12);
   return out;
 }

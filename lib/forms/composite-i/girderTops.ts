@@ -23,7 +23,6 @@ export function girderTops(
   task: UnitTask,
   layout: GirderLayout,
   slab: SlabDesign,
-  girderM: number,
   modularRatio: number,
   modulusMPa: number,
 ): GirderTops {
@@ -37,7 +36,7 @@ export function girderTops(
   const tributaryM = task.deck.widthM / layout.count;
   const thicknessM = slab.meanM;
   // The soffit of the slab stands on the girder at the line; its mean thickness hangs from the level top.
-  const slabAxisM = girderM + slab.rootM - thicknessM / 2;
+  const slabAboveM = slab.rootM - thicknessM / 2;
   const n1 = modularRatio * compositeData.longTermRatio.value;
   const last = spansM.length - 1;
   let lastWidthM = NaN;
@@ -60,13 +59,13 @@ export function girderTops(
       const top = (n: number): GirderTop => ({
         slabAreaM2: area / n,
         slabInertiaM4: own / n,
-        slabAxisM,
+        slabAboveM,
         barAreaM2: 0,
-        barAxisM: slabAxisM,
+        barAboveM: slabAboveM,
       });
       short.push(top(modularRatio));
       lasting.push(top(n1));
-      cracked.push({ ...bareGirder, slabAxisM, barAreaM2: bars, barAxisM: slabAxisM });
+      cracked.push({ ...bareGirder, slabAboveM, barAreaM2: bars, barAboveM: slabAboveM });
     }
     lastWidthM = widthM;
     shrinkageKN[e] = isCracked[e] === 1 ? 0 : (compositeData.shrinkage.strain * modulusMPa * 1e3 * area) / n1;

@@ -1,11 +1,10 @@
 import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
-import { constantDepth } from '../common/depthAlong.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { girderChecks, heaviestPiece } from './girderChecks.ts';
-import { girderElevation, girderSections } from './girderDrawing.ts';
+import { girderDepthAlong, girderElevation, girderSections } from './girderDrawing.ts';
 import { girderFiguresOf, ownWeightShare } from './girderReport.ts';
 import { girderLines } from './girderLines.ts';
 import { girderModel } from './girderModel.ts';
@@ -13,8 +12,10 @@ import { girderReactions } from './girderReactions.ts';
 import { sizeGirder } from './sizeGirder.ts';
 
 /**
- * Composite I-girders of constant depth: two girders with cross-girders or more girders with bracing, a concrete slab on
- * top, built unpropped. `depthM` of the task is soffit to top of slab over the girders. Simple or continuous spans of
+ * Composite I-girders: two girders with cross-girders or more girders with bracing, a concrete slab on top, built
+ * unpropped. `depthM` of the task is soffit to top of slab over the girders, at midspan where `haunch` deepens them over
+ * the piers. Webs deeper than about 3 m have a stiffener along them. `substringers` halve the span of the slab between
+ * three girders or more. The lean of a haunched bottom flange, which takes shear off the web, is left out. Simple or continuous spans of
  * about 20 to 120 m, decks of 8 to 25 m.
  */
 export const compositeI: FormModule = {
@@ -33,11 +34,11 @@ function size(task: UnitTask): Design {
   const model = girderModel(task);
   const girder = sizeGirder(model);
   const checks = girderChecks(model, girder);
-  const depthM = model.girderM + model.slab.rootM;
+  const depthAlong = girderDepthAlong(model);
   return {
     task,
-    depthM: { support: depthM, midspan: depthM },
-    depthAlong: constantDepth(model.lengthM, depthM),
+    depthM: { support: Math.max(...depthAlong.depthM), midspan: model.girderM + model.slab.rootM },
+    depthAlong,
     elevation: girderElevation(model, girder.run),
     sections: girderSections(model, girder.run, girder.secondary.crossGirderM),
     reactions: girderReactions(model, girder),

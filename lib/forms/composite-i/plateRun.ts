@@ -1,8 +1,8 @@
 import type { GirderPlates } from './girderSection.ts';
 
-/** Plates of a girder from end to end, by element; widths are the same throughout. */
+/** Plates of a girder from end to end, by element; widths are the same throughout, heights those of the model. */
 export interface PlateRun {
-  readonly heightM: number;
+  readonly heightM: Float64Array;
   readonly topWidthM: number;
   readonly bottomWidthM: number;
   readonly topM: Float64Array;
@@ -14,7 +14,7 @@ const scratch = { heightM: 0, topWidthM: 0, topM: 0, bottomWidthM: 0, bottomM: 0
 
 /** Plates of element `e`. The object is reused: read it before asking again. */
 export function platesAt(run: PlateRun, e: number): GirderPlates {
-  scratch.heightM = run.heightM;
+  scratch.heightM = run.heightM[e]!;
   scratch.topWidthM = run.topWidthM;
   scratch.bottomWidthM = run.bottomWidthM;
   scratch.topM = run.topM[e]!;

@@ -3,11 +3,15 @@ import { compositeData } from './compositeData.ts';
 import { girderFigures, type GirderFigures } from './girderSection.ts';
 import type { GirderEffects } from './girderEffects.ts';
 import type { GirderModel } from './girderModel.ts';
+import { elementsPerSpan } from './elementsPerSpan.ts';
 import { platesAt, type PlateRun } from './plateRun.ts';
+import { carryingFrameKg } from './substringers.ts';
+import { alongKg } from './webStiffener.ts';
 
 /** Steel of a deck besides webs and flanges, kg for the whole width, and what of it is painted. */
 export interface SecondarySteel {
   readonly crossKg: number;
+  readonly substringersKg: number;
   readonly stiffenersKg: number;
   readonly bearingStiffenersKg: number;
   readonly studsKg: number;
@@ -33,7 +37,7 @@ export function secondarySteel(
   effects: GirderEffects,
   plateKg: number,
 ): SecondarySteel {
-  const { layout, girderM, braceAtM, supportsM } = model;
+  const { layout, girderM, braceAtM, supportsM, heights } = model;
   const density = materials.steelDensityKgM3;
   const frame = frameMomentKNm(model, run);
   const fyKNm2 = model.yieldMPa(0.03) * 1e3;
@@ -41,35 +45,59 @@ export function secondarySteel(
   const cross = layout.twin ? crossGirders(model, frame / fyKNm2, inner) : crossFrames(model, inner);
 
   const { stiffeners, post } = compositeData;
-  const webM = girderM - Math.min(...run.topM) - Math.min(...run.bottomM);
+  const flangesM = Math.min(...run.topM) + Math.min(...run.bottomM);
+  const webM = meanBraceHeight(model) - flangesM;
   const widthM = stiffeners.widthBaseM + stiffeners.widthPerHeight * girderM;
   const thicknessM = Math.max(stiffeners.leastMm / 1000, widthM / stiffeners.slenderness);
   const pair = 2 * widthM * thicknessM;
   const postArea = layout.twin
     ? Math.max(pair, frame / fyKNm2 / (post.leverRatio * post.depthOverGirder * girderM))
     : pair;
-  const stiffenersKg = layout.count * inner * postArea * webM * density;
+  const stiffenersKg = layout.count * (inner * postArea * webM * density + alongKg(model, run.heightM));
   const reactions = designReactions(model, effects);
-  const bearingArea = reactions.reduce(
-    (sum, kN) => sum + Math.max(2 * pair, kN / (stiffeners.bearingStressShare * fyKNm2)),
+  const bearingM3 = reactions.reduce(
+    (sum, kN, j) =>
+      sum +
+      Math.max(2 * pair, kN / (stiffeners.bearingStressShare * fyKNm2)) *
+        (heights.atStationM[j * elementsPerSpan]! - flangesM),
     0,
   );
-  const bearingStiffenersKg = layout.count * bearingArea * webM * density;
+  const bearingStiffenersKg = layout.count * bearingM3 * density;
+  const substringersKg = model.substringers
+    ? model.substringers.lines * model.substringers.beam.massKgPerM * model.lengthM
+    : 0;
   const studs = layout.count * studsOnGirder(model, run, effects);
   const studsKg = studs * compositeData.studs.kgEach;
   const weldsKg =
     compositeData.weldsAndBoltsShare.value * (plateKg + cross.kg + stiffenersKg + bearingStiffenersKg);
   return {
     crossKg: cross.kg,
+    substringersKg,
     stiffenersKg,
     bearingStiffenersKg,
     studsKg,
     weldsKg,
-    totalKg: cross.kg + stiffenersKg + bearingStiffenersKg + studsKg + weldsKg,
+    totalKg: cross.kg + substringersKg + stiffenersKg + bearingStiffenersKg + studsKg + weldsKg,
     crossGirderM: cross.heightM,
     crossName: cross.name,
     studs,
   };
+}
+
+/** Mean height of the girders where they are braced in the spans, m. */
+function meanBraceHeight({ heights, braceAtM, supportsM, elementM, girderM }: GirderModel): number {
+  if (!heights.haunched) return girderM;
+  let e = 0;
+  let start = 0;
+  let sum = 0;
+  let count = 0;
+  for (const at of braceAtM) {
+    if (supportsM.some((x) => Math.abs(x - at) < 1e-6)) continue;
+    while (e < elementM.length - 1 && start + elementM[e]! < at) start += elementM[e++]!;
+    sum += heights.ofElementM[e]!;
+    count++;
+  }
+  return count > 0 ? sum / count : girderM;
 }
 
 /** Moment of a transverse frame at half height, kNm: share of the greatest flange force plus the wind of a bay. */
@@ -80,10 +108,10 @@ function frameMomentKNm(model: GirderModel, run: PlateRun): number {
     const thickness = run.bottomM[e]!;
     const force =
       crossGirder.flangeForceShare * run.bottomWidthM * thickness * model.yieldMPa(thickness) * 1e3 +
-      (crossGirder.windKNm2 * model.girderM * model.bracingM[e]!) / 2;
-    most = Math.max(most, force);
+      (crossGirder.windKNm2 * run.heightM[e]! * model.bracingM[e]!) / 2;
+    most = Math.max(most, force * run.heightM[e]!);
   }
-  return (most * model.girderM) / 2;
+  return most / 2;
 }
 
 interface Cross {
@@ -117,7 +145,13 @@ function crossFrames(model: GirderModel, inner: number): Cross {
   const lengthM = deep ? 2 * Math.hypot(spacingM, model.girderM) + 2 * spacingM : spacingM;
   const kgPerM = deep ? crossFrame.kgPerM : crossFrame.channelKgPerM;
   const perSupport = deep ? crossFrame.kgPerMAtSupports : crossFrame.channelKgPerM;
-  const kg = (count - 1) * lengthM * (inner * kgPerM + model.supportsM.length * perSupport);
+  const supports = model.supportsM.length;
+  const { substringers } = model;
+  const bay = (least: number): number =>
+    substringers
+      ? carryingFrameKg(substringers, spacingM, model.girderM, model.yieldMPa(0.03), least)
+      : lengthM * least;
+  const kg = (count - 1) * (inner * bay(kgPerM) + supports * bay(perSupport));
   return { kg, heightM: 0, name: deep ? 'cross-frames of angles' : 'channels' };
 }
 
@@ -140,7 +174,7 @@ export function studsOnGirder(model: GirderModel, run: PlateRun, effects: Girder
   for (let e = 0; e < model.elementM.length; e++) {
     const top = model.short[e]!;
     const { centroidM, inertiaM4 } = girderFigures(figures, platesAt(run, e), top);
-    const first = top.slabAreaM2 * (top.slabAxisM - centroidM);
+    const first = top.slabAreaM2 * (run.heightM[e]! + top.slabAboveM - centroidM);
     const { superimposed, traffic } = effects;
     const laid = (Math.abs(superimposed.shearRightKN[e]!) + Math.abs(superimposed.shearLeftKN[e + 1]!)) / 2;
     const moving = (absoluteShear(traffic, e) + absoluteShear(traffic, e + 1)) / 2;

@@ -1,5 +1,5 @@
 import { materials } from '../../actions/index.ts';
-import { roundPlateUp, thickestPlateM } from '../common/plates.ts';
+import { roundPlateUp, roundWidthUp, thickestPlateM } from '../common/plates.ts';
 import { compositeData } from './compositeData.ts';
 import { elementChecks, noUse } from './elementChecks.ts';
 import { fatigueLimitMPa, fatigueRange } from './fatigueRange.ts';
@@ -11,6 +11,7 @@ import { platesAt, sameRun, type PlateRun } from './plateRun.ts';
 import { secondarySteel, type SecondarySteel } from './secondarySteel.ts';
 import { designShear, flangeNeeds, flangeWidths, sizeWeb, steppedFlange } from './sizePlates.ts';
 import { stageMoments, type StageMoments } from './stageMoments.ts';
+import { mostWebSlenderness } from './webStiffener.ts';
 
 /** One girder with its plates and what it was checked with. */
 export interface SizedGirder {
@@ -64,7 +65,7 @@ function guessRun(model: GirderModel): PlateRun {
   const fy = model.yieldMPa(0.05) * 1e3;
   const areas = Float64Array.from({ length: elements }, (_, e) => {
     const moment = Math.max(Math.abs(model.guessKNm[e]!), Math.abs(model.guessKNm[e + 1]!));
-    return moment / (model.girderM * fy);
+    return moment / (model.heights.ofElementM[e]! * fy);
   });
   const most = Math.max(...areas);
   const { topM: topWidthM, bottomM: bottomWidthM } = flangeWidths(model, 0.7 * most, most);
@@ -73,16 +74,21 @@ function guessRun(model: GirderModel): PlateRun {
   const thickest = thickestPlateM(model.standardId);
   const thickness = (area: number, widthM: number, leastM: number): number =>
     Math.min(thickest, Math.max(leastM, area / widthM));
-  const webM = roundPlateUp(
-    Math.max(web.leastMm[model.standardId] / 1000, model.girderM / web.mostHeightOverThickness.value),
+  const webM = model.heights.ofElementM.map((heightM) =>
+    Math.min(
+      web.mostMm.value / 1000,
+      roundPlateUp(
+        Math.max(web.leastMm[model.standardId] / 1000, heightM / mostWebSlenderness(model, heightM)),
+      ),
+    ),
   );
   return {
-    heightM: model.girderM,
+    heightM: model.heights.ofElementM,
     topWidthM,
     bottomWidthM,
     topM: areas.map((area) => thickness(0.7 * area, topWidthM, least)),
     bottomM: areas.map((area) => thickness(area, bottomWidthM, leastBottom)),
-    webM: new Float64Array(elements).fill(Math.min(webM, web.mostMm.value / 1000)),
+    webM,
   };
 }
 
@@ -139,23 +145,36 @@ function thickened(
   equivalentKNm: Float64Array,
   fatigueMPa: number,
 ): PlateRun {
-  let top = false;
-  let bottom = false;
+  let topUse = 0;
+  let bottomUse = 0;
   for (let e = 0; e < model.elementM.length; e++) {
     elementChecks(use, model, platesAt(run, e), e, moments, equivalentKNm, fatigueMPa);
-    top ||= Math.max(use.castTop, use.sagTop, use.hogTop, use.fatigueTop) > 1;
-    bottom ||= Math.max(use.sagBottom, use.hogBottom, use.service, use.fatigueBottom) > 1;
+    topUse = Math.max(topUse, use.castTop, use.sagTop, use.hogTop, use.fatigueTop);
+    bottomUse = Math.max(bottomUse, use.sagBottom, use.hogBottom, use.service, use.fatigueBottom);
   }
+  const top = topUse > 1;
+  const bottom = bottomUse > 1;
   const webNeed = sizeWeb(model, run, shearKN);
   const web = webNeed.some((t, e) => t > run.webM[e]!);
   if (!top && !bottom && !web) return run;
   const next = { ...run, webM: web ? run.webM.map((t, e) => Math.max(t, webNeed[e]!)) : run.webM };
   const needs = flangeNeeds(model, next, moments, equivalentKNm, fatigueMPa);
+  const topWidthM = top ? widened(model, needs.top, run.topWidthM, topUse) : run.topWidthM;
+  const bottomWidthM = bottom ? widened(model, needs.bottom, run.bottomWidthM, bottomUse) : run.bottomWidthM;
   return {
     ...next,
-    topM: top ? steppedFlange(model, needs.top, run.topWidthM, run.topM) : run.topM,
-    bottomM: bottom ? steppedFlange(model, needs.bottom, run.bottomWidthM, run.bottomM) : run.bottomM,
+    topWidthM,
+    bottomWidthM: Math.max(bottomWidthM, topWidthM),
+    topM: top ? steppedFlange(model, needs.top, topWidthM, run.topM) : run.topM,
+    bottomM: bottom ? steppedFlange(model, needs.bottom, bottomWidthM, run.bottomM) : run.bottomM,
   };
+}
+
+/** Width of a flange whose thickest plate is not enough, m: wider by what it lacks; that of a box is given. */
+function widened(model: GirderModel, needM: Float64Array, widthM: number, use: number): number {
+  const enough = needM.every((t) => t < thickestPlateM(model.standardId) - 1e-9);
+  if (enough || model.plate) return widthM;
+  return Math.max(widthM, Math.min(compositeData.flange.mostWidthM, roundWidthUp(widthM * use)));
 }
 
 /** Mean mass of webs and flanges of one girder, kg/m. */

@@ -9,6 +9,7 @@ import type { GirderModel } from './girderModel.ts';
 import type { GirderPlates } from './girderSection.ts';
 import type { PlateRun } from './plateRun.ts';
 import type { StageMoments } from './stageMoments.ts';
+import { mostWebSlenderness } from './webStiffener.ts';
 
 /** Design shear on one girder, kN, by element: greatest over its ends and over the signs of traffic. */
 export function designShear(model: GirderModel, effects: GirderEffects): Float64Array {
@@ -52,9 +53,9 @@ export function sizeWeb(model: GirderModel, run: PlateRun, shearKN: Float64Array
   const { web, bendingShear } = compositeData;
   const rolled = plateThicknessesMm.map((mm) => mm / 1000).filter((t) => t <= web.mostMm.value / 1000);
   const need = Float64Array.from(shearKN, (v, e) => {
-    const height = model.girderM - run.topM[e]! - run.bottomM[e]!;
+    const height = run.heightM[e]! - run.topM[e]! - run.bottomM[e]!;
     const longM = height * (model.plate?.slant ?? 1);
-    const least = Math.max(web.leastMm[model.standardId] / 1000, longM / web.mostHeightOverThickness.value);
+    const least = Math.max(web.leastMm[model.standardId] / 1000, longM / mostWebSlenderness(model, height));
     const fits = rolled.find(
       (t) => t >= least - 1e-9 && v <= bendingShear.most * webCapacityKN(model, e, t, height),
     );
@@ -115,7 +116,7 @@ export function flangeNeeds(
   const least = compositeData.flange.leastMm / 1000;
   const leastBottom = model.plate?.leastM ?? least;
   const plates = {
-    heightM: run.heightM,
+    heightM: 0,
     topWidthM: run.topWidthM,
     bottomWidthM: run.bottomWidthM,
     topM: 0,
@@ -123,6 +124,7 @@ export function flangeNeeds(
     webM: 0,
   };
   for (let e = 0; e < elements; e++) {
+    plates.heightM = run.heightM[e]!;
     plates.topM = run.topM[e]!;
     plates.bottomM = run.bottomM[e]!;
     plates.webM = run.webM[e]!;

@@ -77,9 +77,9 @@ export function floorBeam(
   const slab = (ratio: number): GirderTop => ({
     slabAreaM2: (demand.slabWidthM * demand.slabM) / ratio,
     slabInertiaM4: (demand.slabWidthM * demand.slabM ** 3) / 12 / ratio,
-    slabAxisM: h + demand.slabM / 2,
+    slabAboveM: demand.slabM / 2,
     barAreaM2: 0,
-    barAxisM: 0,
+    barAboveM: 0,
   });
   const short = slab(n0);
   const long = slab(n0 * d.modularLong.value);

@@ -109,8 +109,12 @@ export function sizeFloor(floor: FloorCase): Floor {
   };
 }
 
-function sizeStringer(
-  floor: FloorCase,
+/** What a line of stringers hangs on: the deck, the beams that carry it and the depth there is. */
+export type StringerCase = Pick<FloorCase, 'standard' | 'deck' | 'crossSpacingM' | 'depthM'>;
+
+/** Stringers `pitchM` apart at `offsetsM` across the deck, simple spans from cross-girder to cross-girder, all alike. */
+export function sizeStringer(
+  floor: StringerCase,
   standard: LoadStandard,
   slab: SlabDesign,
   pitchM: number,

@@ -27,9 +27,9 @@ describe('girderFigures()', () => {
     const top: GirderTop = {
       slabAreaM2: 1.8 / n,
       slabInertiaM4: (6 * 0.3 ** 3) / 12 / n,
-      slabAxisM: 2.95,
+      slabAboveM: 0.15,
       barAreaM2: 0,
-      barAxisM: 2.95,
+      barAboveM: 0.15,
     };
     const expected = sectionProperties([...steel, slab]);
     girderFigures(out, plates, top);

@@ -1,0 +1,82 @@
+import {
+  concrete,
+  materials,
+  trafficOnCrossLine,
+  trafficOnInfluence,
+  type CrossLine,
+  type LoadStandard,
+} from '../../actions/index.ts';
+import type { UnitTask } from '../../model/index.ts';
+import type { SlabDesign } from '../common/slab/designSlab.ts';
+import type { FloorBeam } from '../floor/floorBeam.ts';
+import { sizeStringer } from '../floor/sizeFloor.ts';
+import { compositeData } from './compositeData.ts';
+import type { GirderLayout } from './girderLayout.ts';
+
+/** One line of beams midway between each two girders, simple spans from cross-frame to cross-frame. */
+export interface Substringers {
+  readonly beam: FloorBeam;
+  readonly lines: number;
+  /** Design load that a cross-frame takes from one line, kN. */
+  readonly onFrameKN: number;
+}
+
+/** Sizes the substringers of a deck and what they put on the cross-frames. `bayM` between cross-frames, m. */
+export function substringers(
+  task: UnitTask,
+  standard: LoadStandard,
+  layout: GirderLayout,
+  slab: SlabDesign,
+  bayM: number,
+  yieldMPa: (thicknessM: number) => number,
+): Substringers {
+  const pitchM = layout.spacingM / 2;
+  const offsetsM = layout.offsetsM.slice(1).map((y) => y - pitchM);
+  const ecm = concrete(task.standard, materials.concreteDefaultMPa[task.standard].slab).ecmMPa;
+  const beam = sizeStringer(
+    { standard: task.standard, deck: task.deck, crossSpacingM: bayM, depthM: task.depthM },
+    standard,
+    slab,
+    pitchM,
+    offsetsM,
+    (mm) => yieldMPa(mm / 1000),
+    ecm,
+  );
+  const { uls } = standard.factors;
+  const dead = slab.meanM * pitchM * standard.unitWeights.concreteKNm3 + (beam.massKgPerM * 9.81) / 1000;
+  const laid = (task.deck.superimposedKNm / task.deck.widthM) * pitchM;
+  const traffic = Math.max(
+    ...offsetsM.map((y) => {
+      const line: CrossLine = { yM: [-1e3, y - pitchM, y, y + pitchM, 1e3], value: [0, 0, 1, 0, 0] };
+      const load = trafficOnCrossLine(task.standard, task.deck, line, 1000 / (2 * bayM));
+      return trafficOnInfluence(load, [0, bayM, 2 * bayM], [0, 1, 0]).max;
+    }),
+  );
+  return {
+    beam,
+    lines: offsetsM.length,
+    onFrameKN: (uls.permanent * dead + uls.superimposed * laid) * bayM + uls.traffic * traffic,
+  };
+}
+
+/**
+ * Mass of one bay of a cross-frame that carries a substringer at its middle, kg: chords for R s / 4 over its depth,
+ * diagonals for R / 2, as struts; never less than an ordinary frame.
+ */
+export function carryingFrameKg(
+  { onFrameKN }: Substringers,
+  spacingM: number,
+  girderM: number,
+  fyMPa: number,
+  leastKgPerM: number,
+): number {
+  const { frameDepthOverGirder, strutShare } = compositeData.substringers;
+  const depthM = frameDepthOverGirder * girderM;
+  const diagonalM = Math.hypot(depthM, spacingM / 2);
+  const stress = strutShare * fyMPa * 1000;
+  const perM = (forceKN: number): number =>
+    Math.max(leastKgPerM, (materials.steelDensityKgM3 * forceKN) / stress);
+  const chord = perM((onFrameKN * spacingM) / 4 / depthM);
+  const diagonal = perM(((onFrameKN / 2) * diagonalM) / depthM);
+  return 2 * spacingM * chord + 2 * diagonalM * diagonal;
+}
