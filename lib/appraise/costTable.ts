@@ -1,8 +1,7 @@
 import { formModule } from '../forms/index.ts';
-import type { CostTable, FormId, MeasuredLine } from '../model/index.ts';
-import { expectedLines, placeText, standPierBetween } from '../substructure/index.ts';
+import type { CostTable, FormId } from '../model/index.ts';
 import type { Memory, TrialRow } from './memory.ts';
-import { remembered } from '../kept.ts';
+import { PIER_LOADS_KN, trialPiers } from './trialPiers.ts';
 import { SHARES, trialRows, type FormAndMethod, type RowMakers, type TrialRows } from './trialRows.ts';
 
 /** Place of a value on a rising grid: index of the interval and share within it, held at both ends. */
@@ -23,22 +22,10 @@ export interface TableShelf {
 }
 
 /**
- * Loads, kN, at which a trial pier is really sized at each chainage, permanent and traffic together; in between its cost is
- * read off straight lines. A pier feels the form it carries through its load.
- */
-const PIER_LOADS_KN = [1500, 4000, 8000, 14000, 24000, 45000, 90000] as const;
-/** Of that load, what is permanent, and the depth of the deck on it, m: ordinary road decks. */
-const PIER_PERMANENT = 0.7;
-const PIER_DECK_DEPTH_M = 2;
-/** Span over which the trial load is spread, m: gives wind and friction their size. */
-const PIER_SPAN_M = 40;
-
-/**
  * What the search knows of cost, made by the real sizing, take-off and mean rates: deck cost and depth of each form
  * at a few spans of its possible band, supports by what they meet at their chainage.
  */
 export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>): TableShelf {
-  const { site, costOf } = makers;
   const shelf = new Map<string, TrialRows>();
   const rowsFor = (asked: FormAndMethod): TrialRows => {
     const key = `${asked.form} ${asked.method}`;
@@ -48,34 +35,7 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
   };
   const usual = (form: FormId): FormAndMethod => ({ form, method: formModule(form).methods[0] });
 
-  const roadLevel = (chainageM: number): number => {
-    const { road, startM, lengthM } = site;
-    return road.startLevelM + ((road.endLevelM - road.startLevelM) * (chainageM - startM)) / lengthM;
-  };
-  /** A trial pier at a chainage under one of the loads. */
-  const trialPier = (chainageM: number, load: number): MeasuredLine[] => {
-    const perM = PIER_LOADS_KN[load]! / PIER_SPAN_M;
-    const deck = {
-      permanentKNm: PIER_PERMANENT * perM,
-      trafficKNm: (1 - PIER_PERMANENT) * perM,
-      depthM: PIER_DECK_DEPTH_M,
-    };
-    return expectedLines(
-      standPierBetween(site, deck, chainageM, PIER_SPAN_M, PIER_SPAN_M, roadLevel(chainageM)),
-    );
-  };
-  const costs = new Map<number, Float64Array>();
-  /** Its cost at mean rates with the odds of the ground. */
-  const pierCost = (chainageM: number, load: number): number => {
-    let byLoad = costs.get(chainageM);
-    if (!byLoad) costs.set(chainageM, (byLoad = new Float64Array(PIER_LOADS_KN.length).fill(NaN)));
-    if (Number.isNaN(byLoad[load]!)) {
-      const place = `${placeText(site, chainageM)} ${roadLevel(chainageM)}`;
-      const lines = remembered(piers, place, () => []);
-      byLoad[load] = costOf((lines[load] ??= trialPier(chainageM, load)));
-    }
-    return byLoad[load]!;
-  };
+  const pierCost = trialPiers(makers, piers);
 
   const tableFor = (asked: FormAndMethod): CostTable => {
     const byForm = new Map<FormId, TrialRows>();
@@ -95,9 +55,8 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
     };
     return {
       deckPerM(form, spanM, governingM) {
-        const [i, within] = between(SHARES, governingM > 0 ? spanM / governingM : 1);
-        const at = (k: number): number => read(form, governingM, (row) => row.perM[k]!);
-        return at(i) + within * (at(i + 1) - at(i));
+        const [k, within] = between(SHARES, governingM > 0 ? spanM / governingM : 1);
+        return read(form, governingM, ({ perM }) => perM[k]! + within * (perM[k + 1]! - perM[k]!));
       },
       depthM: (form, governingM) => read(form, governingM, (row) => row.depthM),
       unitFixed: (form, governingM, pylons = 0) =>

@@ -1,35 +1,43 @@
 import type { ArrangeRequest, Windows } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { Site } from '../model/index.ts';
+import type { FormId, Site } from '../model/index.ts';
 import { endRatioWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import type { FormAndMethod } from './trialRows.ts';
 
 /** Half a pier along the road with its working space, kept clear of barred stretches, m. Common practice, no source. */
 export const PIER_HALF_WIDTH_M = 1.5;
-/** Where no rule speaks of end spans: from the uplift limit to equal spans. */
-const ANY_END_RATIO = [0.5, 1] as const;
+/** Least distance between two supports of a hung unit over its shortest main span. Common practice, no source. */
+const HUNG_SPACING = 0.5;
 
-function windowsOf(form: FormAndMethod['form'], site: Site): Windows {
+/** Band of the longest span of a unit on a crossing. */
+function spanBand(form: FormId, site: Site): Pick<Windows, 'minSpanM' | 'maxSpanM'> {
   const open = openSpans(form, site.lengthM);
   if (!open)
     throw new RangeError(`arrangement: ${form} has no span that fits a crossing of ${site.lengthM} m`);
-  return {
-    minSpanM: open[0],
-    maxSpanM: open[1],
-    endRatio: endRatioWindow(form) ?? ANY_END_RATIO,
-  };
+  return { minSpanM: open[0], maxSpanM: open[1] };
 }
 
-/** What the search is asked for one form and method: its pattern and the windows that the rules leave open. */
+function continuousWindows(form: FormId, site: Site): Windows {
+  const endRatio = endRatioWindow(form);
+  if (endRatio === null) throw new RangeError(`no end span window in the rules of ${form}`);
+  return { ...spanBand(form, site), endRatio };
+}
+
+/**
+ * What the search is asked for one form and method: its pattern and the windows that the rules leave open.
+ * @throws RangeError where no span fits the crossing, or where the rules of a continuous form say nothing of end spans: a
+ *   fault of the book
+ */
 export function requestFor({ form, method }: FormAndMethod, site: Site): ArrangeRequest {
   const { pattern } = formModule(form);
+  const base = { form, method, pattern, pierHalfWidthM: PIER_HALF_WIDTH_M };
+  if (pattern.kind === 'continuous') return { ...base, windows: continuousWindows(form, site) };
+  const band = spanBand(form, site);
   return {
-    form,
-    method,
-    pattern,
-    windows: windowsOf(form, site),
-    ...(pattern.kind === 'continuous' ? {} : { approach: windowsOf(pattern.approach, site) }),
-    pierHalfWidthM: PIER_HALF_WIDTH_M,
+    ...base,
+    // The main unit has no end spans; pylons have ratios of their own in the pattern.
+    windows: pattern.kind === 'pylon' ? { ...band, minSpacingM: HUNG_SPACING * band.minSpanM } : band,
+    approach: continuousWindows(pattern.approach, site),
   };
 }

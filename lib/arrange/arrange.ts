@@ -6,7 +6,7 @@ import { frameOf, type Frame } from './frame.ts';
 import { mainUnitCandidates } from './mainUnits.ts';
 import { polish } from './polish.ts';
 import { flatTable, relaxationsOf } from './relaxations.ts';
-import type { ArrangeRequest, ArrangeResult } from './request.ts';
+import { KEPT, type ArrangeRequest, type ArrangeResult } from './request.ts';
 import { select } from './select.ts';
 
 function candidatesOf(
@@ -18,7 +18,7 @@ function candidatesOf(
 ): Candidate[] {
   return request.pattern.kind === 'continuous'
     ? continuousCandidates(request, frame, table, dropped, enough)
-    : mainUnitCandidates(request, frame, table, dropped);
+    : mainUnitCandidates(request, frame, table, dropped, enough);
 }
 
 function frameFor(request: ArrangeRequest, site: Site, table: CostTable): Frame {
@@ -43,7 +43,7 @@ export function arrange(request: ArrangeRequest, site: Site, table: CostTable): 
   const dropped = counter();
   const frame = frameFor(request, site, table);
   const candidates = candidatesOf(request, frame, table, dropped);
-  const polished = select(candidates, request.keep ?? 3, frame, site, table, dropped)
+  const polished = select(candidates, request.keep ?? KEPT, frame, site, table, dropped)
     .map((best) => polish(best, request, frame, site, table))
     .sort((a, b) => a.cost - b.cost);
   // An anchor pier may have made two of them the same kind.

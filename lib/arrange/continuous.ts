@@ -4,8 +4,10 @@ import type { Counter } from './counter.ts';
 import { supportCosts } from './curves.ts';
 import type { Frame } from './frame.ts';
 import { limitsOf, spanFault, type Limits } from './limits.ts';
-import type { ArrangeRequest } from './request.ts';
-import { fewestSpans, governingSpans, mostSpans, searchUnit, type UnitTask } from './unitSearch.ts';
+import { KEPT, type ArrangeRequest } from './request.ts';
+import { fewestSpans, governingSpans, mostSpans } from './governingSpans.ts';
+import { searchUnit } from './unitSearch.ts';
+import type { UnitTask } from './unitTask.ts';
 
 /** Why a number of spans cannot be laid out with one governing span: open ground first, then the barred stretches. */
 function reasonFor(frame: Frame, limits: Limits, spans: number, governingM: number): string {
@@ -48,29 +50,30 @@ export function continuousCandidates(
     lastEnd: last,
     limits,
     supports,
+    keep: request.keep ?? KEPT,
     endIsPier: false,
   };
-  const found: Candidate[] = [];
+  const found = new Map<string, Candidate>();
   const laid = new Set<string>();
-  const seen = new Set<string>();
-  searchUnit(task, table, (end, spans, governingM, estimate, trace) => {
+  const cut = searchUnit(task, table, (end, spans, governingM, estimate, trace) => {
     laid.add(`${governingM} ${spans}`);
     const at = trace(end, spans);
     const name = at.join();
-    if (seen.has(name)) return true;
-    seen.add(name);
+    const known = found.get(name);
+    if (known !== undefined && known.estimate <= estimate) return true;
     const fault = spanFault(
       at.slice(1).map((i, s) => frame.X[i]! - frame.X[at[s]!]!),
       limits,
     );
-    if (fault === null) found.push({ placed: [{ form, role: 'main', at }], estimate });
+    if (fault === null) found.set(name, { placed: [{ form, role: 'main', at }], estimate });
     else dropped.add(fault);
-    return found.length < enough;
+    return found.size < enough;
   });
   for (const governingM of governingSpans(task)) {
     for (let k = fewestSpans(limits, frame.lengthM, governingM); k <= mostSpans(task, governingM); k += 1) {
-      if (!laid.has(`${governingM} ${k}`)) dropped.add(reasonFor(frame, limits, k, governingM));
+      if (laid.has(`${governingM} ${k}`)) continue;
+      dropped.add(cut.has(governingM) ? 'dearer than those kept' : reasonFor(frame, limits, k, governingM));
     }
   }
-  return found;
+  return [...found.values()];
 }

@@ -13,9 +13,12 @@ export interface Limits {
 /** Slack with which ratios and spans are compared. */
 export const SLACK = 1e-9;
 
+/** Window of a unit without end spans. */
+const NO_END_SPANS = [1, 1] as const;
+
 /** Applies the defaults of `Windows` once; throws RangeError on a band or ratio that is reversed or not positive. */
 export function limitsOf(windows: Windows): Limits {
-  const { minSpanM, maxSpanM, endRatio } = windows;
+  const { minSpanM, maxSpanM, endRatio = NO_END_SPANS } = windows;
   const [endLeast, endMost] = endRatio;
   if (!(minSpanM > 0 && maxSpanM >= minSpanM))
     throw new RangeError(`span band: received ${minSpanM} to ${maxSpanM} m`);

@@ -14,13 +14,25 @@ export interface MainSearch {
   /** Indices at which the main span may end on the left and on the right of what it goes over. */
   readonly left: readonly number[];
   readonly right: readonly number[];
+  /** Last index at which the main span may begin and first at which it may end. */
+  readonly latestLeft: number;
+  readonly earliestRight: number;
   /** Indices of ends of the main unit that lie beyond its pylons. */
   readonly outerLeft: readonly number[];
   readonly outerRight: readonly number[];
   /** Approaches from either abutment to each index. */
   readonly toLeft: readonly (readonly Approach[])[];
   readonly toRight: readonly (readonly Approach[])[];
+  /** Deck, fixed cost and supports of a main unit alone and its main span, m; null where it may not stand so. */
+  readonly ownCost: (
+    at: readonly number[],
+    pylons: readonly number[],
+  ) => { readonly cost: number; readonly mainM: number } | null;
+  /** Whether a layout would be the cheapest of its kind so far; asked before one is put together. */
+  readonly wants: (pylons: number, spans: number, mainM: number, cost: number) => boolean;
   offer(layout: MainLayout): void;
+  /** Whether as many have been found as were asked for. */
+  readonly isEnough: () => boolean;
   noApproach(): void;
 }
 

@@ -6,25 +6,38 @@ import { halfCosts, supportCosts, type SupportCosts } from './curves.ts';
 import type { Frame } from './frame.ts';
 import { limitsOf, SLACK, type Limits } from './limits.ts';
 import type { MainLayout, MainSearch } from './mainSearch.ts';
-import { pylonLayouts } from './pylons.ts';
+import { pylonCost, pylonLayouts, spanRows } from './pylons.ts';
+import { refine } from './refine.ts';
 import type { ArrangeRequest } from './request.ts';
-import { simpleLayouts } from './simpleMain.ts';
+import { simpleCost, simpleLayouts } from './simpleMain.ts';
 
 /** Without a barred stretch and above this many positions the main span goes over the middle of the crossing. */
 const MANY = 700;
-/** Places tried on each side of the opening, at most. */
-const PLACES = 160;
+/** Places tried on each side of the opening before the best are refined; edges of barred stretches come on top. */
+const PLACES = 64;
+
+/** The cheapest is kept for each class of main span: whole metres, or this share of a longer crossing. */
+const MAIN_CLASSES = 400;
 
 /** More than any number of spans or metres of main span: keeps the parts of a key apart. */
 const MOST_SPANS = 2 ** 15;
 
-/** At most `PLACES` of the indices first..last, both ends among them. */
-function places(first: number, last: number): number[] {
-  if (last < first) return [];
-  const stride = Math.ceil((last - first + 1) / PLACES);
+/** Steps between places tried among the indices first..last. */
+const strideOf = (first: number, last: number): number => Math.max(1, Math.ceil((last - first + 1) / PLACES));
+
+/** At most `PLACES` of the indices first..last and the last: of each few the one beside a stretch without any, or the first. */
+function places(X: Float64Array, first: number, last: number): number[] {
+  const stride = strideOf(first, last);
+  const wide = (2 * X[X.length - 1]!) / X.length + 1;
+  const isBeside = (i: number): boolean =>
+    X[i]! - (X[i - 1] ?? X[i]!) > wide || (X[i + 1] ?? X[i]!) - X[i]! > wide;
   const all: number[] = [];
-  for (let i = first; i <= last; i += stride) all.push(i);
-  if (all.at(-1) !== last) all.push(last);
+  for (let i = first; i <= last; i += stride) {
+    let chosen = i;
+    for (let j = Math.min(i + stride, last + 1) - 1; i > first && j > i; j -= 1) if (isBeside(j)) chosen = j;
+    all.push(chosen);
+  }
+  if (all.length > 0 && all.at(-1) !== last) all.push(last);
   return all;
 }
 
@@ -98,6 +111,7 @@ export function mainUnitCandidates(
   frame: Frame,
   table: CostTable,
   dropped: Counter,
+  enough = Infinity,
 ): Candidate[] {
   const { pattern, form, approach } = request;
   if (pattern.kind === 'continuous' || approach === undefined) {
@@ -107,8 +121,8 @@ export function mainUnitCandidates(
   const approachLimits = limitsOf(approach);
   const { X } = frame;
   const ranges = rangesOf(frame, limits, reachOf(request));
-  const left = places(...ranges.left);
-  const right = places(...ranges.right);
+  const left = places(X, ...ranges.left);
+  const right = places(X, ...ranges.right);
   const inBand = (spanM: number): boolean =>
     spanM >= limits.minSpanM - SLACK && spanM <= limits.maxSpanM + SLACK;
   if (!left.some((a) => right.some((b) => inBand(X[b]! - X[a]!)))) {
@@ -121,6 +135,10 @@ export function mainUnitCandidates(
   const approachMost = Math.max(Math.min(approachLimits.maxSpanM, frame.lengthM), least);
   const supports = supportCosts(table, pattern.approach, frame, least, approachMost);
   const best = new Map<number, MainLayout>();
+  const classM = Math.max(1, frame.lengthM / MAIN_CLASSES);
+  const keyOf = (pylons: number, spans: number, mainM: number): number =>
+    (pylons * MOST_SPANS + spans) * MOST_SPANS + Math.round(mainM / classM);
+  const rowOf = spanRows({ request, table });
   const search: MainSearch = {
     request,
     limits,
@@ -129,20 +147,35 @@ export function mainUnitCandidates(
     half: (index, spanM) => own.A[index]! + own.B[index]! * spanM,
     left,
     right,
-    outerLeft: places(...ranges.outerLeft),
-    outerRight: places(...ranges.outerRight),
+    latestLeft: ranges.left[1],
+    earliestRight: ranges.right[0],
+    outerLeft: places(X, ...ranges.outerLeft),
+    outerRight: places(X, ...ranges.outerRight),
     toLeft: approachesTo(pattern.approach, X, ...ranges.outerLeft, approachLimits, supports, table),
     toRight: approachesFromEnd(pattern.approach, X, ...ranges.outerRight, approachLimits, supports, table),
-    offer(layout) {
-      const spans = layout.before.spans + layout.after.spans + layout.at.length - 1;
-      const key = (layout.pylons.length * MOST_SPANS + spans) * MOST_SPANS + Math.round(layout.mainM);
-      const known = best.get(key);
-      if (known === undefined || layout.cost < known.cost * (1 - 1e-9)) best.set(key, layout);
+    ownCost: (at, pylons) =>
+      pattern.kind === 'pylon'
+        ? pylonCost(search, pattern, rowOf, at, pylons)
+        : simpleCost(search, at[0]!, at[1]!),
+    wants(pylons, spans, mainM, cost) {
+      const known = best.get(keyOf(pylons, spans, mainM));
+      return known === undefined || cost < known.cost * (1 - 1e-9);
     },
+    offer(layout) {
+      const { at, pylons, mainM, before, after, cost } = layout;
+      const spans = before.spans + after.spans + at.length - 1;
+      if (search.wants(pylons.length, spans, mainM, cost))
+        best.set(keyOf(pylons.length, spans, mainM), layout);
+    },
+    isEnough: () => best.size >= enough,
     noApproach: () => dropped.add('no approach spans within their windows'),
   };
-  if (pattern.kind === 'pylon') pylonLayouts(search, pattern);
+  if (pattern.kind === 'pylon') pylonLayouts(search, pattern, rowOf);
   else simpleLayouts(search);
+  const strides = [ranges.left, ranges.right, ranges.outerLeft, ranges.outerRight].map(([first, last]) =>
+    strideOf(first, last),
+  );
+  refine(search, [...best.values()], Math.max(...strides));
   const found: Candidate[] = [];
   for (const { at, pylons, before, after, cost } of best.values()) {
     const placed: PlacedUnit[] = [];

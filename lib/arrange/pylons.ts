@@ -13,6 +13,18 @@ interface Side {
 
 const KEPT = 3;
 
+/** First of the rising indices whose position is `fromM` or beyond, by its place among them. */
+function firstFrom(X: Float64Array, indices: readonly number[], fromM: number): number {
+  let low = 0;
+  let high = indices.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (X[indices[middle]!]! < fromM) low = middle + 1;
+    else high = middle;
+  }
+  return low;
+}
+
 /**
  * Cheapest ends of the span beyond a pylon, each with its approach, at most one for each number of approach spans:
  * the span over the main span lies in `window`.
@@ -32,9 +44,12 @@ function sidesBeyond(
   const least = window[0] * mainM - SLACK;
   const most = Math.min(window[1], 1) * mainM + SLACK;
   const best: Side[] = [];
-  for (const end of ends) {
-    const span = toLeft ? X[pylon]! - X[end]! : X[end]! - X[pylon]!;
-    if (span < least || span > most) continue;
+  const from = toLeft ? X[pylon]! - most : X[pylon]! + least;
+  const to = toLeft ? X[pylon]! - least : X[pylon]! + most;
+  for (let e = firstFrom(X, ends, from); e < ends.length; e += 1) {
+    const end = ends[e]!;
+    if (X[end]! > to) break;
+    const span = Math.abs(X[end]! - X[pylon]!);
     const lists = approaches[end]!;
     if (lists.length === 0) continue;
     const pier = end > 0 && end < last ? search.half(end, span) : 0;
@@ -78,6 +93,8 @@ function onePylon(
   for (const side of sides) {
     for (const approach of beyond) {
       const cost = main.onePylon + half(pylon, mainM) + pier + side.cost + approach.cost;
+      const spans = side.approach.spans + approach.spans + 2;
+      if (!search.wants(1, spans, mainM, cost)) continue;
       const at = pylonLeft ? [side.end, pylon, far] : [far, pylon, side.end];
       const [before, after] = pylonLeft ? [side.approach, approach] : [approach, side.approach];
       search.offer({ at, pylons: [1], mainM, cost, before, after });
@@ -97,6 +114,8 @@ function twoPylons(search: MainSearch, main: Main, window: readonly [number, num
   for (const left of lefts) {
     for (const right of rights) {
       const cost = main.twoPylons + half(a, mainM) + half(b, mainM) + left.cost + right.cost;
+      const spans = left.approach.spans + right.approach.spans + 3;
+      if (!search.wants(2, spans, mainM, cost)) continue;
       const at = [left.end, a, b, right.end];
       search.offer({ at, pylons: [1, 2], mainM, cost, before: left.approach, after: right.approach });
     }
@@ -104,20 +123,66 @@ function twoPylons(search: MainSearch, main: Main, window: readonly [number, num
   return rights.length > 0;
 }
 
-/** Main units hung from one pylon (on either side of the opening) or two: every pair of places in the span band. */
-export function pylonLayouts(search: MainSearch, pattern: Extract<Pattern, { kind: 'pylon' }>): void {
-  const { X, limits, left, right, table, request } = search;
+type PylonPattern = Extract<Pattern, { kind: 'pylon' }>;
+
+/** Rows of span costs by whole metre of main span. */
+export type SpanRows = (mainM: number) => SpanCosts;
+
+/** Reads the rows of one form off the table when they are first asked for. */
+export function spanRows({ table, request }: Pick<MainSearch, 'table' | 'request'>): SpanRows {
   const rows = new Map<number, SpanCosts>();
+  return (mainM) => {
+    const whole = Math.ceil(mainM - SLACK);
+    let row = rows.get(whole);
+    if (row === undefined) {
+      row = spanCosts(table, { form: request.form, role: 'main' }, whole);
+      rows.set(whole, row);
+    }
+    return row;
+  };
+}
+
+/** Deck, fixed cost and supports of a hung unit without anchor piers; null where its spans break their windows. */
+export function pylonCost(
+  search: MainSearch,
+  pattern: PylonPattern,
+  rowOf: SpanRows,
+  at: readonly number[],
+  pylons: readonly number[],
+): { readonly cost: number; readonly mainM: number } | null {
+  const { X, limits, half, table, request } = search;
+  const x = at.map((i) => X[i]!);
+  const last = X.length - 1;
+  const one = pylons.length === 1;
+  // With one pylon the main span is the longer one.
+  const m = one ? (x[1]! - x[0]! >= x[2]! - x[1]! ? 0 : 1) : 1;
+  const mainM = x[m + 1]! - x[m]!;
+  if (!(mainM >= limits.minSpanM - SLACK && mainM <= limits.maxSpanM + SLACK)) return null;
+  if (at[m]! > search.latestLeft || at[m + 1]! < search.earliestRight) return null;
+  if (pylons.some((p) => at[p] === 0 || at[p] === last)) return null;
+  const window = one ? pattern.onePylonBack : pattern.twoPylonSide;
+  const row = rowOf(mainM);
+  let cost = table.unitFixed(request.form, mainM, pylons.length);
+  for (let s = 0; s < x.length - 1; s += 1) {
+    const span = x[s + 1]! - x[s]!;
+    if (s !== m && !(span >= window[0] * mainM - SLACK && span <= Math.min(window[1], 1) * mainM + SLACK))
+      return null;
+    cost += spanCostAt(row, span);
+    if (at[s]! > 0) cost += half(at[s]!, span);
+    if (at[s + 1]! < last) cost += half(at[s + 1]!, span);
+  }
+  return { cost, mainM };
+}
+
+/** Main units hung from one pylon (on either side of the opening) or two: every pair of places in the span band. */
+export function pylonLayouts(search: MainSearch, pattern: PylonPattern, rowOf: SpanRows): void {
+  const { X, limits, left, right, table, request } = search;
   for (const a of left) {
+    if (search.isEnough()) return;
     for (const b of right) {
       const mainM = X[b]! - X[a]!;
       if (!(mainM >= limits.minSpanM - SLACK && mainM <= limits.maxSpanM + SLACK)) continue;
-      const whole = Math.ceil(mainM - SLACK);
-      let row = rows.get(whole);
-      if (row === undefined) {
-        row = spanCosts(table, { form: request.form, role: 'main' }, whole);
-        rows.set(whole, row);
-      }
+      const row = rowOf(mainM);
       const deck = spanCostAt(row, mainM);
       const main = {
         a,

@@ -76,7 +76,6 @@ export function relaxationsOf(request: ArrangeRequest, site: Site, fits: Fits): 
     );
   });
   const { minSpanM, maxSpanM, endRatio } = windows;
-  const [least, most] = endRatio;
   if (maxSpanM < site.lengthM) {
     const to = nearest(maxSpanM, site.lengthM, 0.1, (span) =>
       fits(withWindows(request, { maxSpanM: span }), site),
@@ -87,14 +86,25 @@ export function relaxationsOf(request: ArrangeRequest, site: Site, fits: Fits): 
     fits(withWindows(request, { minSpanM: span }), site),
   );
   add('shortest-span', form, minSpanM, shorter, 'm');
-  const low = nearest(least, least / 20, 0.005, (r) =>
-    fits(withWindows(request, { endRatio: [r, most] }), site),
-  );
-  add('end-ratio', form, least, low, '-');
-  const high = nearest(most, most * 4, 0.005, (r) =>
-    fits(withWindows(request, { endRatio: [least, r] }), site),
-  );
-  add('end-ratio', form, most, high, '-');
+  if (endRatio !== undefined) {
+    const [least, most] = endRatio;
+    const fitsWith = (ratios: readonly [number, number]): boolean =>
+      fits(withWindows(request, { endRatio: ratios }), site);
+    add(
+      'end-ratio',
+      form,
+      least,
+      nearest(least, least / 20, 0.005, (r) => fitsWith([r, most])),
+      '-',
+    );
+    add(
+      'end-ratio',
+      form,
+      most,
+      nearest(most, most * 4, 0.005, (r) => fitsWith([least, r])),
+      '-',
+    );
+  }
   const share = ({ from, to }: Relaxation): number => Math.abs(to - from) / from;
   return found.sort((a, b) => share(a) - share(b));
 }

@@ -5,13 +5,19 @@ export interface Windows {
   /** Band of the longest span of a unit, m. */
   readonly minSpanM: number;
   readonly maxSpanM: number;
-  /** End span over the interior span beside it; with two spans the shorter over the longer must reach the first figure. */
-  readonly endRatio: readonly [least: number, most: number];
+  /**
+   * End span over the interior span beside it; with two spans the shorter over the longer must reach the first figure.
+   * Every continuous unit needs it; a main unit of one span or on pylons has none.
+   */
+  readonly endRatio?: readonly [least: number, most: number];
   /** Interior span over the longest span of the unit; the first figure of `endRatio` unless given. */
   readonly interiorLeast?: number;
-  /** Least distance between two supports, m; first figure of `endRatio` x `minSpanM` unless given. */
+  /** Least distance between two supports, m; first figure of `endRatio` x `minSpanM`, or without one `minSpanM`, unless given. */
   readonly minSpacingM?: number;
 }
+
+/** How many different arrangements are kept unless the request says otherwise. */
+export const KEPT = 3;
 
 /** What is to be arranged: one form with its method on one site. */
 export interface ArrangeRequest {

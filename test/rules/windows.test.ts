@@ -116,7 +116,8 @@ describe('endRatioWindow(form), sideRatioWindow(form, pylons), leastHeadroomSpar
   it('continuous girders and boxes keep their end spans between uplift and governing the deck', () => {
     expect(endRatioWindow('composite-i')).toEqual([0.5, 1]);
     expect(endRatioWindow('concrete-box')).toEqual([0.5, 1]);
-    expect(endRatioWindow('slab')).toBeNull();
+    expect(endRatioWindow('slab')).toEqual([0.5, 1]);
+    expect(endRatioWindow('truss')).toBeNull();
   });
   it('side spans of stayed decks stay under half the main span', () => {
     expect(sideRatioWindow('cable-stayed', 2)![1]).toBeLessThan(0.5);

@@ -1,0 +1,105 @@
+import { remembered } from '../kept.ts';
+import type { MeasuredLine, Site } from '../model/index.ts';
+import { groundAt, stretchAt } from '../site/index.ts';
+import { expectedLines, placeText, settingAt, standPierBetween } from '../substructure/index.ts';
+import type { Memory } from './memory.ts';
+import type { RowMakers } from './trialRows.ts';
+
+/**
+ * Loads, kN, at which a trial pier is really sized at each chainage, permanent and traffic together; in between its cost is
+ * read off straight lines. A pier feels the form it carries through its load.
+ */
+export const PIER_LOADS_KN = [1500, 4000, 8000, 14000, 24000, 45000, 90000] as const;
+/** Of that load, what is permanent, and the depth of the deck on it, m: ordinary road decks. */
+const PIER_PERMANENT = 0.7;
+const PIER_DECK_DEPTH_M = 2;
+/** Span over which the trial load is spread, m: gives wind and friction their size. */
+const PIER_SPAN_M = 40;
+
+/** Trial piers stand this share of the crossing apart, and never closer or farther than these, m. */
+const KNOTS = 60;
+const KNOT_M = [2, 20] as const;
+/** Ground this near to the straight line between two trial piers is as good as on it, m. */
+const STRAIGHT_M = 0.3;
+
+/** Everything but levels that a pier meets: two places alike in this differ by their ground and water depth alone. */
+function likeness(site: Site, chainageM: number): string {
+  const { waterDepthM, waterLevelM, floodDepthM, impact } = settingAt(site, chainageM);
+  return [
+    stretchAt(site, chainageM),
+    waterDepthM > 0,
+    waterLevelM,
+    floodDepthM > 0,
+    impact?.forceKN,
+    impact?.heightM,
+  ].join();
+}
+
+/** Cost of a pier, money, at a chainage, m, under one of `PIER_LOADS_KN` by its index. */
+export type PierCost = (chainageM: number, load: number) => number;
+
+/**
+ * Costs of piers along a crossing at mean rates with the odds of the ground. A pier is really sized at even distances, and
+ * wherever ground, water or traffic nearby change between two of those; in between cost is read off straight lines.
+ */
+export function trialPiers(
+  { site, costOf }: Pick<RowMakers, 'site' | 'costOf'>,
+  piers: Memory['piers'],
+): PierCost {
+  const { road, startM, lengthM } = site;
+  const roadLevel = (chainageM: number): number =>
+    road.startLevelM + ((road.endLevelM - road.startLevelM) * (chainageM - startM)) / lengthM;
+  const sized = (chainageM: number, load: number): MeasuredLine[] => {
+    const perM = PIER_LOADS_KN[load]! / PIER_SPAN_M;
+    const deck = {
+      permanentKNm: PIER_PERMANENT * perM,
+      trafficKNm: (1 - PIER_PERMANENT) * perM,
+      depthM: PIER_DECK_DEPTH_M,
+    };
+    return expectedLines(
+      standPierBetween(site, deck, chainageM, PIER_SPAN_M, PIER_SPAN_M, roadLevel(chainageM)),
+    );
+  };
+  const exact = (chainageM: number, load: number): number => {
+    const place = `${placeText(site, chainageM)} ${roadLevel(chainageM)}`;
+    const lines = remembered(piers, place, () => []);
+    return costOf((lines[load] ??= sized(chainageM, load)));
+  };
+
+  const count = Math.max(
+    1,
+    Math.ceil(lengthM / Math.min(KNOT_M[1], Math.max(KNOT_M[0], lengthM / KNOTS)) - 1e-9),
+  );
+  const knotAt = (k: number): number => startM + (k * lengthM) / count;
+  const likes: (string | undefined)[] = [];
+  const likeAt = (k: number): string => (likes[k] ??= likeness(site, knotAt(k)));
+  /** The interval of trial piers a place may be read off, or -1 where it has to be sized itself. */
+  const intervalOf = (chainageM: number): number => {
+    const k = Math.min(count - 1, Math.max(0, Math.floor(((chainageM - startM) * count) / lengthM)));
+    const [from, to] = [knotAt(k), knotAt(k + 1)];
+    const share = (chainageM - from) / (to - from);
+    if (!(share >= 0 && share <= 1)) return -1;
+    const straight = (1 - share) * groundAt(site, from) + share * groundAt(site, to);
+    if (Math.abs(groundAt(site, chainageM) - straight) > STRAIGHT_M) return -1;
+    return likeAt(k) === likeAt(k + 1) && likeAt(k) === likeness(site, chainageM) ? k : -1;
+  };
+
+  const costs = new Map<number, Float64Array>();
+  const intervals = new Map<number, number>();
+  const known = (chainageM: number, load: number, make: PierCost): number => {
+    let byLoad = costs.get(chainageM);
+    if (!byLoad) costs.set(chainageM, (byLoad = new Float64Array(PIER_LOADS_KN.length).fill(NaN)));
+    if (Number.isNaN(byLoad[load]!)) byLoad[load] = make(chainageM, load);
+    return byLoad[load]!;
+  };
+  const read: PierCost = (chainageM, load) => {
+    let k = intervals.get(chainageM);
+    if (k === undefined) intervals.set(chainageM, (k = intervalOf(chainageM)));
+    if (k < 0) return exact(chainageM, load);
+    const [from, to] = [knotAt(k), knotAt(k + 1)];
+    if (chainageM === from || chainageM === to) return exact(chainageM, load);
+    const [low, high] = [known(from, load, exact), known(to, load, exact)];
+    return low + ((high - low) * (chainageM - from)) / (to - from);
+  };
+  return (chainageM, load) => known(chainageM, load, read);
+}

@@ -1,0 +1,79 @@
+import type { HalfCosts, SpanCosts } from './curves.ts';
+import { SLACK } from './limits.ts';
+import type { UnitTask } from './unitTask.ts';
+
+/** Working room of one search, reused for every governing span. */
+interface Room {
+  /** Predecessor of each position by the number of spans used to reach it, most spans x n. */
+  readonly back: Int32Array;
+  /** Best closed layouts by number of spans and end, (most spans + 1) x ends: cost, last and last but one support. */
+  readonly closed: Float64Array;
+  readonly closedZ: Int32Array;
+  readonly closedY: Int32Array;
+  /** Last interior spans ending on a position, by rising length: the span, its cost, its other end. */
+  readonly S: Float64Array;
+  readonly V: Float64Array;
+  readonly Y: Int32Array;
+  readonly queue: Int32Array;
+}
+
+export function roomFor(n: number, ends: number, most: number): Room {
+  return {
+    back: new Int32Array(most * n),
+    closed: new Float64Array((most + 1) * ends),
+    closedZ: new Int32Array((most + 1) * ends),
+    closedY: new Int32Array((most + 1) * ends),
+    S: new Float64Array(n),
+    V: new Float64Array(n),
+    Y: new Int32Array(n),
+    queue: new Int32Array(n),
+  };
+}
+
+export interface Layers {
+  readonly task: UnitTask;
+  readonly G: number;
+  readonly K: number;
+  readonly cost: SpanCosts;
+  readonly half: HalfCosts;
+  readonly room: Room;
+  /** A layout dearer than this need not be followed, and what the rest of it costs at least for each metre. */
+  readonly boundCost: number;
+  readonly restPerM: number;
+  /** Set once something was left out as too dear. */
+  cut: boolean;
+}
+
+/** Least that one more span costs for each metre of it: its deck and half the support it begins on. */
+export function leastPerM({ limits }: UnitTask, G: number, cost: SpanCosts, { A, B }: HalfCosts): number {
+  let a = Infinity;
+  let b = Infinity;
+  for (let i = 1; i < A.length - 1; i += 1) {
+    a = Math.min(a, A[i]!);
+    b = Math.min(b, B[i]!);
+  }
+  let least = Infinity;
+  for (let s = Math.max(1, Math.floor(limits.minSpacingM)); s <= Math.ceil(G); s += 1) {
+    // A span is straight between whole metres, so its cost for each metre is least at one of them.
+    least = Math.min(least, (cost[s]! + Math.min(0, a)) / s + Math.max(0, a) / (s + 1) + b);
+  }
+  return Math.max(0, least);
+}
+
+/** Whether the cheapest way to reach a position is too dear to be followed. */
+export function isTooDear(layers: Layers, cost: number, x: number): boolean {
+  const { task, boundCost, restPerM } = layers;
+  if (!(cost + restPerM * (task.X[task.firstEnd]! - x) > boundCost)) return false;
+  if (cost < Infinity) layers.cut = true;
+  return true;
+}
+
+export function close(layers: Layers, k: number, end: number, cost: number, z: number, y: number): void {
+  const at = k * (layers.task.lastEnd - layers.task.firstEnd + 1) + end - layers.task.firstEnd;
+  const { closed, closedZ, closedY } = layers.room;
+  if (cost < closed[at]! - SLACK * Math.abs(cost)) {
+    closed[at] = cost;
+    closedZ[at] = z;
+    closedY[at] = y;
+  }
+}

@@ -1,0 +1,18 @@
+import type { FormId } from '../model/index.ts';
+import type { SupportCosts } from './curves.ts';
+import type { Limits } from './limits.ts';
+
+/** One continuous unit that starts at position 0 of `X` and ends at any of the positions firstEnd..lastEnd. */
+export interface UnitTask {
+  readonly form: FormId;
+  /** Candidate positions, m, rising from 0. */
+  readonly X: Float64Array;
+  readonly firstEnd: number;
+  readonly lastEnd: number;
+  readonly limits: Limits;
+  readonly supports: SupportCosts;
+  /** Only the cheapest layouts by this many numbers of spans are wanted; layouts that are clearly dearer may be left out. */
+  readonly keep?: number;
+  /** Whether the support at the end is a pier, half of which the unit carries. */
+  readonly endIsPier: boolean;
+}
