@@ -6,6 +6,7 @@ import loads from '../../data/evidence/loads.json';
 import mechanics from '../../data/evidence/mechanics.json';
 import precastI from '../../data/evidence/precast-i.json';
 import sections from '../../data/evidence/sections.json';
+import steelBox from '../../data/evidence/steel-box.json';
 import { evidenceCases } from './cases/index.ts';
 import { evidenceFile, type EvidenceRow } from './evidenceRow.ts';
 import { runEvidence, type EvidenceLine } from './runEvidence.ts';
@@ -20,6 +21,7 @@ const files: Readonly<Record<string, unknown>> = {
   'composite-box': compositeBox,
   'precast-i': precastI,
   'cantilever-box': cantileverBox,
+  'steel-box': steelBox,
 };
 
 /** Names of the files read, with their ending. */

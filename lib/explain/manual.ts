@@ -17,6 +17,7 @@ import { precastIFigures } from '../forms/precast-i/figures.ts';
 import { halfThroughFigures } from '../forms/half-through/figures.ts';
 import { troughFigures } from '../forms/precast-trough/figures.ts';
 import { slabBridgeFigures } from '../forms/slab/figures.ts';
+import { steelBoxFigures } from '../forms/steel-box/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
 import type { Descriptor } from '../model/index.ts';
 import { priceFigures } from '../price/figures.ts';
@@ -53,6 +54,7 @@ export const manual: readonly Descriptor[] = [
   ...troughFigures,
   ...adjacentFigures,
   ...halfThroughFigures,
+  ...steelBoxFigures,
   ...trussFigures,
   ...cableFigures,
   ...floorPractice,

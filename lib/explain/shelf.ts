@@ -12,6 +12,7 @@ import pretensioned from '../../data/forms/pretensioned.json';
 import slab from '../../data/forms/slab.json';
 import slabDeck from '../../data/forms/slab-deck.json';
 import halfThrough from '../../data/forms/half-through.json';
+import steelBox from '../../data/forms/steel-box.json';
 import truss from '../../data/forms/truss.json';
 import ground from '../../data/ground.json';
 import materials from '../../data/materials.json';
@@ -47,6 +48,7 @@ const files: Readonly<Record<string, unknown>> = {
   'precast-trough': precastTrough,
   'adjacent-box': adjacentBox,
   'half-through': halfThrough,
+  'steel-box': steelBox,
   truss,
   'cable-stayed': cableStayed,
 };

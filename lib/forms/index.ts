@@ -10,6 +10,7 @@ import { slab } from './slab/index.ts';
 import { halfThrough } from './half-through/index.ts';
 import { precastI } from './precast-i/index.ts';
 import { precastTrough } from './precast-trough/index.ts';
+import { steelBox } from './steel-box/index.ts';
 import { truss } from './truss/index.ts';
 
 export type { FormModule, Pattern } from './formModule.ts';
@@ -25,6 +26,7 @@ export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   'composite-box': compositeBox,
   'concrete-box': concreteBox,
   'cantilever-box': cantileverBox,
+  'steel-box': steelBox,
   truss,
   'cable-stayed': cableStayed,
 };

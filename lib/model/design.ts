@@ -19,6 +19,8 @@ export interface UnitTask {
   readonly haunch?: Haunch;
   /** Composite I-girders: beams between the girders, carried by the cross-frames, so that the slab spans half the spacing. */
   readonly substringers?: boolean;
+  /** Thickness of an orthotropic deck plate, m, where it is given; by wheels and surfacing when absent. */
+  readonly deckPlateM?: number;
   /** Cable-stayed: which supports (0-based) carry pylons. */
   readonly pylons?: readonly number[];
   /** Height of the road above ground at each support, m, where known (pylon legs, falsework). */

@@ -29,9 +29,7 @@ const methodsOf = (at: At): string[] => [...new Set(at.option.designs.map(({ tas
 const steelLines = (at: At): string[] =>
   at.option.designs.flatMap((design, u) =>
     design.lines.flatMap((line, i) =>
-      line.item === 'plate-girder-steel' || line.item === 'truss-steel'
-        ? [`${at.root}/designs/${u}/lines/${i}/quantity`]
-        : [],
+      line.item.endsWith('-steel') ? [`${at.root}/designs/${u}/lines/${i}/quantity`] : [],
     ),
   );
 

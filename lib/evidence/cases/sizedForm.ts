@@ -7,7 +7,7 @@ import type { CaseInputs, EvidenceCase } from '../caseInputs.ts';
 /**
  * A form sized by the pipeline's own module: quantities per m2 of deck, the figures of its design, and own weight share.
  * Inputs: form, spansM, widthM, carriagewayM, lanes, depthM; optional standard, girders, pierDepthM (parabolic haunch),
- * substringers (1 or 0), pylons, surfacingM, radiusM.
+ * substringers (1 or 0), pylons, surfacingM, radiusM, deckPlateM.
  */
 export const sizedForm: EvidenceCase = (inputs) => {
   const form = oneOf<FormId>(inputs.text('form'), formIds);
@@ -28,6 +28,7 @@ export const sizedForm: EvidenceCase = (inputs) => {
       ? { haunch: { pierDepthM: inputs.number('pierDepthM'), law: 'parabolic' as const } }
       : {}),
     ...(inputs.has('substringers') ? { substringers: inputs.number('substringers') === 1 } : {}),
+    ...(inputs.has('deckPlateM') ? { deckPlateM: inputs.number('deckPlateM') } : {}),
     ...(inputs.has('pylons') ? { pylons: inputs.numbers('pylons') } : {}),
   });
   const deckAreaM2 = spansM.reduce((sum, span) => sum + span, 0) * deck.widthM;

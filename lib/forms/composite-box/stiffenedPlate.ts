@@ -39,33 +39,42 @@ export function platePressedShare(field: PlateField, thicknessM: number, fyMPa: 
   return panel * strutShare(field, thicknessM, fyMPa);
 }
 
+/** A strip of plate with its T-stiffener: area, axis above the middle of the plate, inertia about it, centroid of the T alone. */
+export interface StiffenedStrip {
+  readonly areaM2: number;
+  readonly axisM: number;
+  readonly inertiaM4: number;
+  readonly teeM: number;
+}
+
+/** Strip of `widthM` of a plate with a T-stiffener `heightM` high. */
+export function stiffenedStrip(widthM: number, thicknessM: number, heightM: number): StiffenedStrip {
+  const { webM, flangeM, flangeWidthM } = platesOf(heightM);
+  const h = heightM;
+  const plate = widthM * thicknessM;
+  const web = h * webM;
+  const flange = flangeWidthM * flangeM;
+  // Heights from the middle of the plate.
+  const webZ = (thicknessM + h) / 2;
+  const flangeZ = thicknessM / 2 + h + flangeM / 2;
+  const areaM2 = plate + web + flange;
+  const axisM = (web * webZ + flange * flangeZ) / areaM2;
+  const own = (plate * thicknessM ** 2 + web * h ** 2 + flange * flangeM ** 2) / 12;
+  const away = plate * axisM ** 2 + web * (webZ - axisM) ** 2 + flange * (flangeZ - axisM) ** 2;
+  return { areaM2, axisM, inertiaM4: own + away, teeM: (web * webZ + flange * flangeZ) / (web + flange) };
+}
+
 /** Reduction of the stiffener with its panel as a strut. */
 export function strutShare(
   { pitchM, frameM, stiffener }: PlateField,
   thicknessM: number,
   fyMPa: number,
 ): number {
-  const h = stiffener.heightM;
-  const { webM, flangeM, flangeWidthM } = platesOf(h);
-  // Plate, web and flange of the T; heights from the middle of the plate.
-  const parts = [
-    { area: pitchM * thicknessM, z: 0, own: (pitchM * thicknessM ** 3) / 12 },
-    { area: h * webM, z: (thicknessM + h) / 2, own: (webM * h ** 3) / 12 },
-    {
-      area: flangeWidthM * flangeM,
-      z: thicknessM / 2 + h + flangeM / 2,
-      own: (flangeWidthM * flangeM ** 3) / 12,
-    },
-  ];
-  const area = parts.reduce((sum, part) => sum + part.area, 0);
-  const axis = parts.reduce((sum, part) => sum + part.area * part.z, 0) / area;
-  const inertia = parts.reduce((sum, part) => sum + part.own + part.area * (part.z - axis) ** 2, 0);
-  const gyration = Math.sqrt(inertia / area);
+  const { areaM2, axisM, inertiaM4, teeM } = stiffenedStrip(pitchM, thicknessM, stiffener.heightM);
+  const gyration = Math.sqrt(inertiaM4 / areaM2);
   const lambda = columnSlenderness(frameM, gyration, fyMPa);
   if (lambda <= 0.2) return 1;
-  const [, web, flange] = parts;
-  const tee = (web!.area * web!.z + flange!.area * flange!.z) / (web!.area + flange!.area);
-  const imperfection = 0.49 + (0.09 * Math.max(axis, tee - axis)) / gyration;
+  const imperfection = 0.49 + (0.09 * Math.max(axisM, teeM - axisM)) / gyration;
   const phi = 0.5 * (1 + imperfection * (lambda - 0.2) + lambda ** 2);
   return Math.min(1, 1 / (phi + Math.sqrt(phi ** 2 - lambda ** 2)));
 }

@@ -1,0 +1,321 @@
+import { trafficEnvelope, trafficOnInfluence, type TrafficEnvelope } from '../../actions/index.ts';
+import {
+  deflectionInfluence,
+  launchStages,
+  lineBeam,
+  loadTrack,
+  momentInfluence,
+  pointLoads,
+  stepped,
+  uniform,
+  type Effects,
+  type LineBeam,
+  type Track,
+} from '../../mechanics/index.ts';
+import { curveTorque } from '../composite-box/tubTorsion.ts';
+import { fatigueRange } from '../floor/fatigue.ts';
+import { boxSection, noSection, type BoxPlates } from './boxSection.ts';
+import { steelBoxData } from './steelBoxData.ts';
+import { elementsPerSpan, type SteelBoxModel } from './steelBoxModel.ts';
+
+/** Forces on the whole box with one set of plates. */
+export interface BoxEffects {
+  readonly beam: LineBeam;
+  /** Weight of the steel as it stays after erection, superimposed load, traffic; characteristic. */
+  readonly own: Effects;
+  readonly superimposed: Effects;
+  readonly traffic: TrafficEnvelope;
+  /** Deflection under traffic over its limit, by span. */
+  readonly deflections: readonly number[];
+  /** Design moments of the finished bridge at the stations, kNm: greatest sagging (0 or more) and hogging (0 or less). */
+  readonly sagKNm: Float64Array;
+  readonly hogKNm: Float64Array;
+  /** Design moments while it is built. */
+  readonly stageSagKNm: Float64Array;
+  readonly stageHogKNm: Float64Array;
+  /** Greatest reaction of a launching bearing, kN, design; 0 unless launched. */
+  readonly launchKN: number;
+  /** Design shear of the whole box and design torque, by element. */
+  readonly shearKN: Float64Array;
+  readonly torqueKNm: Float64Array;
+  /** Torque of curvature in plan: greatest, and what it brings to every support, kNm. */
+  readonly curveKNm: number;
+  readonly curveAtKNm: readonly number[];
+  /** Moment range of one lorry equivalent to the whole traffic, kNm at the stations. */
+  readonly rangeKNm: Float64Array;
+}
+
+const section = noSection();
+
+/** Bending stiffness along the box, straight between stations. */
+function stiffness(model: SteelBoxModel, plates: BoxPlates): (xM: number) => number {
+  const { xM, modulusKNm2 } = model;
+  const last = xM.length - 1;
+  const at = (i: number, e: number): number =>
+    boxSection(
+      section,
+      model,
+      i,
+      plates.deckM[e]!,
+      plates.webM[e]!,
+      plates.bottomM[e]!,
+      plates.pressed[e] === 1,
+      0,
+    ).inertiaM4;
+  const ei = Float64Array.from(
+    xM,
+    (_, i) => (modulusKNm2 * (at(i, Math.max(0, i - 1)) + at(i, Math.min(last - 1, i)))) / 2,
+  );
+  return (x) => {
+    let low = 0;
+    let high = last;
+    while (high - low > 1) {
+      const middle = (low + high) >> 1;
+      if (xM[middle]! <= x) low = middle;
+      else high = middle;
+    }
+    const share = Math.min(1, Math.max(0, (x - xM[low]!) / (xM[high]! - xM[low]!)));
+    return ei[low]! + share * (ei[high]! - ei[low]!);
+  };
+}
+
+const tracks = new WeakMap<Float64Array, Track>();
+
+function trackOf(beam: LineBeam): Track {
+  const known = tracks.get(beam.xM);
+  if (known) return known;
+  const made = loadTrack(beam.xM);
+  tracks.set(beam.xM, made);
+  return made;
+}
+
+/**
+ * Spans whose middle is closed by cantilevers from both sides: the longest inner ones where the box is built that way.
+ * Shorter ones are put together on towers before and hold the arms down.
+ */
+export function cantileveredSpans({ task }: Pick<SteelBoxModel, 'task'>): number[] {
+  const { method, spansM } = task;
+  if (method !== 'balanced-cantilever') return [];
+  const least = steelBoxData.cantilever.leastOverLongest * Math.max(...spansM);
+  return spansM.flatMap((span, i) => (i > 0 && i < spansM.length - 1 && span >= least - 1e-9 ? [i] : []));
+}
+
+/**
+ * Weight, superimposed load and traffic on the stiffness of the plates. Cantilevered spans are closed free of force in
+ * their middle: their own weight stays as on a beam with hinges there, as steel does not creep; a launched or propped
+ * box carries it as one beam.
+ * @param ownKNm weight of the steel by element, kN/m
+ * @param before effects whose forces of traffic are kept, where the plates have hardly changed since; its deflections are not
+ */
+export function boxEffects(
+  model: SteelBoxModel,
+  plates: BoxPlates,
+  ownKNm: Float64Array,
+  before: BoxEffects | null,
+): BoxEffects {
+  const { task, supportsM, standard, xM } = model;
+  const { spansM } = task;
+  const { uls } = standard.factors;
+  const geometry = { spansM, stationsPerSpan: elementsPerSpan, eiKNm2: stiffness(model, plates) };
+  const beam = lineBeam(geometry);
+  const closed = cantileveredSpans(model);
+  const hingesM = closed.map((span) => supportsM[span]! + spansM[span]! / 2);
+  const staged = closed.length > 0 ? lineBeam({ ...geometry, hingesM }) : beam;
+  const own = stepped(staged, ownKNm);
+  const superimposed = uniform(beam, task.deck.superimposedKNm);
+  const traffic = before?.traffic ?? trafficEnvelope(beam, model.traffic, { deflection: false });
+  const n = xM.length;
+  const sagKNm = new Float64Array(n);
+  const hogKNm = new Float64Array(n);
+  const designKNm = new Float64Array(n);
+  for (let i = 0; i < n; i++) {
+    const steel = own.momentKNm[i]!;
+    const laid = superimposed.momentKNm[i]!;
+    const factored = (kNm: number, helps: boolean): number =>
+      kNm * (helps ? uls.permanentFavourable : uls.permanent);
+    const laidFactored = (kNm: number, helps: boolean): number =>
+      kNm * (helps ? uls.superimposedFavourable : uls.superimposed);
+    const sag =
+      factored(steel, steel < 0) + laidFactored(laid, laid < 0) + uls.traffic * traffic.momentMaxKNm[i]!;
+    const hog =
+      factored(steel, steel > 0) + laidFactored(laid, laid > 0) + uls.traffic * traffic.momentMinKNm[i]!;
+    sagKNm[i] = Math.max(0, sag);
+    hogKNm[i] = Math.min(0, hog);
+    designKNm[i] = sag > -hog ? sag : hog;
+  }
+  const stage = erection(model, staged, own, ownKNm, hingesM);
+  return {
+    beam,
+    own,
+    superimposed,
+    traffic,
+    deflections: deflections(model, beam),
+    sagKNm,
+    hogKNm,
+    ...stage,
+    shearKN: designShear(model, own, superimposed, traffic),
+    ...torques(model, designKNm),
+    rangeKNm: before?.rangeKNm ?? lorryRange(model, beam),
+  };
+}
+
+/** Deflection of every span under traffic over its limit, at its middle and in end spans a little towards the end. */
+function deflections({ task, standard, traffic }: SteelBoxModel, beam: LineBeam): number[] {
+  const { spansM } = task;
+  const last = spansM.length - 1;
+  const track = trackOf(beam);
+  const loads = standard.deflection.combinations.map((share) => ({
+    ...traffic,
+    vehicleFactor: traffic.vehicleFactor * share.vehicle,
+    udlKNm: traffic.udlKNm * share.uniform,
+    footwayKNm: traffic.footwayKNm * share.uniform,
+  }));
+  return spansM.map((spanM, span) => {
+    const towards = last === 0 ? 0 : span === 0 ? -1 : span === last ? 1 : 0;
+    const station = span * elementsPerSpan + elementsPerSpan / 2 + towards;
+    const line = deflectionInfluence(beam, station);
+    const most = Math.max(...loads.map((load) => trafficOnInfluence(load, track, line).max));
+    return (most * standard.deflection.limitRatio) / spanM;
+  });
+}
+
+/** Design moments while the box is built. */
+function erection(
+  model: SteelBoxModel,
+  staged: LineBeam,
+  own: Effects,
+  ownKNm: Float64Array,
+  hingesM: readonly number[],
+): Pick<BoxEffects, 'stageSagKNm' | 'stageHogKNm' | 'launchKN'> {
+  const n = model.xM.length;
+  const stageSagKNm = new Float64Array(n);
+  const stageHogKNm = new Float64Array(n);
+  const { uls } = model.standard.factors;
+  if (model.task.method === 'launch') {
+    const shares = launchShares(model.task.spansM);
+    const longest = Math.max(...model.task.spansM);
+    const weight = uls.permanent * Math.max(...ownKNm);
+    stageSagKNm.fill(shares.sag * weight * longest ** 2);
+    stageHogKNm.fill(shares.hog * weight * longest ** 2);
+    return { stageSagKNm, stageHogKNm, launchKN: shares.reaction * weight * longest };
+  }
+  const { craneKN, imbalance } = steelBoxData.cantilever;
+  // A derrick on the tip of each of the two arms that meet.
+  const cranes =
+    hingesM.length > 0
+      ? pointLoads(
+          staged,
+          hingesM.map((xM) => ({ xM, loadKN: 2 * craneKN })),
+        )
+      : null;
+  for (let i = 0; i < n; i++) {
+    const moment =
+      uls.permanent * ((1 + imbalance) * own.momentKNm[i]! + (cranes === null ? 0 : cranes.momentKNm[i]!));
+    stageSagKNm[i] = Math.max(0, moment);
+    stageHogKNm[i] = Math.min(0, moment);
+  }
+  return { stageSagKNm, stageHogKNm, launchKN: 0 };
+}
+
+interface LaunchShares {
+  readonly sag: number;
+  readonly hog: number;
+  readonly reaction: number;
+}
+
+const launches = new Map<string, LaunchShares>();
+
+/** Moments over w L2 and reaction over w L of the longest span while it is crossed; they depend on proportions alone. */
+function launchShares(spansM: readonly number[]): LaunchShares {
+  const longest = Math.max(...spansM);
+  const at = spansM.indexOf(longest);
+  const some = spansM.slice(Math.max(0, at - 2), at + 2).map((span) => span / longest);
+  const key = some.map((span) => span.toFixed(4)).join();
+  const known = launches.get(key);
+  if (known) return known;
+  const { noseOverSpan, noseOverDeckWeight, noseStiffness, yardOverSpan } = steelBoxData.launch;
+  const { sagKNm, hogKNm, reactionKN } = launchStages({
+    spansM: some,
+    weightKNm: 1,
+    noseM: noseOverSpan,
+    noseKNm: noseOverDeckWeight,
+    noseStiffness,
+    yardSpansM: [yardOverSpan, yardOverSpan],
+    steps: 5,
+  });
+  const made = { sag: sagKNm, hog: hogKNm, reaction: reactionKN };
+  if (launches.size >= 64) launches.clear();
+  launches.set(key, made);
+  return made;
+}
+
+/** Greatest design shear over the ends of every element and the signs of traffic, kN. */
+function designShear(
+  { standard, elementM }: SteelBoxModel,
+  own: Effects,
+  superimposed: Effects,
+  traffic: TrafficEnvelope,
+): Float64Array {
+  const { uls } = standard.factors;
+  return Float64Array.from(elementM, (_, e) => {
+    const right = uls.permanent * own.shearRightKN[e]! + uls.superimposed * superimposed.shearRightKN[e]!;
+    const left =
+      uls.permanent * own.shearLeftKN[e + 1]! + uls.superimposed * superimposed.shearLeftKN[e + 1]!;
+    return Math.max(
+      Math.abs(right + uls.traffic * traffic.shearMaxKN[e]!),
+      Math.abs(right + uls.traffic * traffic.shearMinKN[e]!),
+      Math.abs(left + uls.traffic * traffic.shearMaxKN[e + 1]!),
+      Math.abs(left + uls.traffic * traffic.shearMinKN[e + 1]!),
+    );
+  });
+}
+
+/** Design torques of a box held against turning at every support: eccentric traffic, and M / R of a curve in plan. */
+function torques(
+  { task, standard, torsion }: SteelBoxModel,
+  designKNm: Float64Array,
+): Pick<BoxEffects, 'torqueKNm' | 'curveKNm' | 'curveAtKNm'> {
+  const uniformKNm = torsion.udlTorqueKNmPerM + torsion.footwayTorqueKNmPerM;
+  const torqueKNm = new Float64Array(designKNm.length - 1);
+  const curveAtKNm = new Array<number>(task.spansM.length + 1).fill(0);
+  let curveKNm = 0;
+  task.spansM.forEach((spanM, span) => {
+    const from = span * elementsPerSpan;
+    const lengthM = spanM / elementsPerSpan;
+    const curve = curveTorque(
+      designKNm.subarray(from, from + elementsPerSpan + 1),
+      lengthM,
+      task.planRadiusM,
+    );
+    curveAtKNm[span]! += Math.abs(curve[0]!);
+    curveAtKNm[span + 1]! += Math.abs(curve[elementsPerSpan]!);
+    for (let e = 0; e < elementsPerSpan; e++) {
+      const rest = (spanM - Math.min(e, elementsPerSpan - 1 - e) * lengthM) / spanM;
+      const traffic = torsion.vehicleTorqueKNm * rest + (uniformKNm * spanM * rest ** 2) / 2;
+      const bent = Math.max(Math.abs(curve[e]!), Math.abs(curve[e + 1]!));
+      curveKNm = Math.max(curveKNm, bent);
+      torqueKNm[from + e] = standard.factors.uls.traffic * traffic + bent;
+    }
+  });
+  return { torqueKNm, curveKNm, curveAtKNm };
+}
+
+/** Every fourth station is run, the rest lie straight between. */
+function lorryRange({ id, task }: SteelBoxModel, beam: LineBeam): Float64Array {
+  const stride = elementsPerSpan / 4;
+  const { spansM } = task;
+  const n = beam.xM.length;
+  const range = new Float64Array(n);
+  const track = trackOf(beam);
+  for (let s = stride; s < n - 1; s += stride) {
+    const span = Math.floor(s / elementsPerSpan);
+    const lengthM = s % elementsPerSpan === 0 ? (spansM[span - 1]! + spansM[span]!) / 2 : spansM[span]!;
+    range[s] = steelBoxData.lorryLanes.value * fatigueRange(id, track, momentInfluence(beam, s), lengthM);
+  }
+  for (let s = 0; s < n; s++) {
+    const before = s - (s % stride);
+    if (before === s) continue;
+    range[s] = range[before]! + ((range[before + stride]! - range[before]!) * (s - before)) / stride;
+  }
+  return range;
+}
