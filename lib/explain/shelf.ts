@@ -8,6 +8,7 @@ import floor from '../../data/forms/floor.json';
 import plates from '../../data/forms/plates.json';
 import precastI from '../../data/forms/precast-i.json';
 import precastTrough from '../../data/forms/precast-trough.json';
+import spliced from '../../data/forms/spliced.json';
 import pretensioned from '../../data/forms/pretensioned.json';
 import slab from '../../data/forms/slab.json';
 import slabDeck from '../../data/forms/slab-deck.json';
@@ -45,6 +46,7 @@ const files: Readonly<Record<string, unknown>> = {
   'concrete-box': concreteBox,
   'precast-i': precastI,
   pretensioned,
+  spliced,
   'precast-trough': precastTrough,
   'adjacent-box': adjacentBox,
   'half-through': halfThrough,

@@ -106,6 +106,8 @@ export interface Design {
   /** Longest and heaviest piece to be brought to site, m and t; null where cast in place. */
   readonly heaviestPiece: { readonly lengthM: number; readonly massT: number } | null;
   readonly warnings: readonly string[];
+  /** Beams put together on towers: rows of splices and tendon stages of the unit, which take time beside its length. */
+  readonly staging?: { readonly splices: number; readonly stages: number };
   /** Named figures of the section and statics for tables and tests (inertia, moments, plate sizes ...), unit in the name. */
   readonly figures: Readonly<Record<string, number>>;
 }

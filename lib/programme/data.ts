@@ -30,6 +30,8 @@ const schema = z.object({
   pylonM: range,
   steelLead: range,
   steelT: range,
+  spliceRow: range,
+  tendonStage: range,
   finishesM2: range,
   finishesFixed: range,
   methods: z.strictObject(

@@ -9,6 +9,11 @@ const point = (at: At): keyof Spread => at.name('point') as keyof Spread;
 /** Which of quick, likely and slow a point of the months belongs to. */
 const speeds: Readonly<Record<keyof Spread, keyof Range>> = { p10: 'low', p50: 'likely', p90: 'high' };
 const speed = (at: At): keyof Range => speeds[point(at)];
+/** Paths of a figure of the units that are put together on towers. */
+const staged = (at: At, figure: 'splices' | 'tendonStages'): string[] =>
+  at.option.designs.flatMap(({ staging }, u) =>
+    staging ? [`${at.root}/designs/${u}/figures/${figure}`] : [],
+  );
 const data = (at: At, name: string): string => `data/programme/${name}/${speed(at)}`;
 const weeks = 'data/programme/weeksPerMonth';
 
@@ -133,16 +138,25 @@ export const programmeFigures: readonly Descriptor[] = [
     label: (at) => `work on the deck, ${pace(at)}`,
     unit: 'months',
     method: 'output',
-    formula: '(fixed weeks of each method + length of each unit / output of its method) / weeks a month',
+    formula:
+      '(fixed weeks of each method + length of each unit / output of its method + splices and tendon stages) / weeks a month',
     inputs: (at) => ({
       fixed: methodsOf(at).map((method) => data(at, `methods/${method}/fixed`)),
       from: at.option.units.map((_, u) => `${at.root}/units/${u}/supportsM/0`),
       to: at.option.units.map((unit, u) => `${at.root}/units/${u}/supportsM/${unit.supportsM.length - 1}`),
       output: at.option.designs.map(({ task }) => data(at, `methods/${task.method}/deckM`)),
+      splices: staged(at, 'splices'),
+      stages: staged(at, 'tendonStages'),
+      row: data(at, 'spliceRow'),
+      stage: data(at, 'tendonStage'),
       weeks,
     }),
     compute: (v) =>
-      (sum(v.fixed) + sum(v.output.map((output, i) => (v.to[i]! - v.from[i]!) / output))) / v.weeks,
+      (sum(v.fixed) +
+        sum(v.output.map((output, i) => (v.to[i]! - v.from[i]!) / output)) +
+        v.row * sum(v.splices) +
+        v.stage * sum(v.stages)) /
+      v.weeks,
   }),
   described({
     path: activity('steel', 'months'),

@@ -24,7 +24,7 @@ const speeds: readonly [Speed, Speed, Speed] = ['low', 'likely', 'high'];
 
 /**
  * Programme of an option: establishment, supports by crews side by side, steel in the shop at the same time, decks unit after
- * unit once enough supports stand and the steel is there, finishes, demobilisation.
+ * unit (with its splices and tendon stages) once enough supports stand and the steel is there, finishes, demobilisation.
  *
  * Quick, likely and slow durations belong to one driver of productivity, so every activity is quick or slow together: then
  * low, likely and high of the whole are the network run with all low, all likely and all high durations, and they are the
@@ -94,7 +94,8 @@ function network(
   const deckWeeks =
     [...methods].reduce((sum, method) => sum + data.methods[method].fixed[speed], 0) +
     designs.reduce(
-      (sum, design) => sum + lengthOf(design) / data.methods[design.task.method].deckM[speed],
+      (sum, design) =>
+        sum + lengthOf(design) / data.methods[design.task.method].deckM[speed] + stagingWeeks(design, speed),
       0,
     );
   // Erection starts when half the steel is made and cannot end before the rest has come.
@@ -112,6 +113,12 @@ function network(
     { id: 'demobilise', label: 'demobilisation', start: deckEnd + finishes, weeks: data.demobilise[speed] },
   );
   return list;
+}
+
+/** Weeks that splices and tendon stages add to the erection of a unit. */
+function stagingWeeks({ staging }: Design, speed: Speed): number {
+  if (!staging) return 0;
+  return staging.splices * programmeData.spliceRow[speed] + staging.stages * programmeData.tendonStage[speed];
 }
 
 const lengthOf = (design: Design): number => design.task.spansM.reduce((sum, span) => sum + span, 0);

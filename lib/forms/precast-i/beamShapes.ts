@@ -4,6 +4,7 @@ import type { SectionPoint } from '../../mechanics/index.ts';
 import type { StandardId } from '../../model/index.ts';
 import { beamShape, deepestWithin, type BeamShape } from '../common/precast/beamShape.ts';
 import { precastData } from './precastData.ts';
+import { splicedData } from './spliced/splicedData.ts';
 
 const point = z.tuple([z.number(), z.number()]);
 const girder = z.object({
@@ -62,19 +63,20 @@ export function catalogueBeam(name: string): BeamShape {
   );
 }
 
-/** Metric bulb-tee of a depth, m: web constant, flanges growing with depth. */
-export function bulbTee(depthM: number, standard: StandardId): BeamShape {
+/** Metric bulb-tee of a depth and web, m: web constant, flanges growing with depth and wider by what the web is thicker. */
+export function bulbTee(depthM: number, standard: StandardId, webM = precastData.bulbTee.webM): BeamShape {
   const d = precastData.bulbTee;
-  const bottom = d.bottomWidthM.base + d.bottomWidthM.perDepth * depthM;
-  const top = d.topWidthM.base + d.topWidthM.perDepth * depthM;
-  const taper = (d.bottomTaper * (bottom - d.webM)) / 2;
+  const more = webM - d.webM;
+  const bottom = more + d.bottomWidthM.base + d.bottomWidthM.perDepth * depthM;
+  const top = more + d.topWidthM.base + d.topWidthM.perDepth * depthM;
+  const taper = (d.bottomTaper * (bottom - webM)) / 2;
   return profiled(
     `bulb-tee ${(depthM * 1000).toFixed(0)}`,
     [
       [0, bottom],
       [d.bottomM, bottom],
-      [d.bottomM + taper, d.webM],
-      [depthM - d.topM - d.topTaperM, d.webM],
+      [d.bottomM + taper, webM],
+      [depthM - d.topM - d.topTaperM, webM],
       [depthM - d.topM, top],
       [depthM, top],
     ],
@@ -106,4 +108,21 @@ export function beamShapes(standard: StandardId): readonly BeamShape[] {
 /** The deepest beams no deeper than `mostM`; the shallowest there is where none fits. */
 export function beamsFor(standard: StandardId, mostM: number): readonly BeamShape[] {
   return deepestWithin(beamShapes(standard), mostM);
+}
+
+const spliced = new Map<StandardId, readonly BeamShape[]>();
+
+/** Bulb-tees with webs for ducts, for beams in pieces: the deepest no deeper than `mostM`; the shallowest where none fits. */
+export function splicedBeams(standard: StandardId, mostM: number): readonly BeamShape[] {
+  const { leastDepthM, stepM } = precastData.bulbTee;
+  const { webM, mostDepthM } = splicedData.beam;
+  let shapesThere = spliced.get(standard);
+  if (!shapesThere) {
+    const steps = Math.round((mostDepthM - leastDepthM) / stepM);
+    shapesThere = Array.from({ length: steps + 1 }, (_, i) =>
+      bulbTee(leastDepthM + i * stepM, standard, webM),
+    );
+    spliced.set(standard, shapesThere);
+  }
+  return deepestWithin(shapesThere, mostM);
 }

@@ -7,9 +7,9 @@ import { beamsFor } from './beamShapes.ts';
 
 /**
  * Every number of beams within practice with the deepest beams that fit under its slab, cheapest first by concrete and an
- * estimate of the strand. The beams take `task.depthM` less slab and fill; the shallowest there is where that is not enough.
+ * estimate of the strand. `shapesFor` gives the deepest beams no deeper than a depth. The beams take `task.depthM` less slab and fill; the shallowest there is where that is not enough.
  */
-export function rankedChoices(task: UnitTask): RankedChoice[] {
+export function rankedChoices(task: UnitTask, shapesFor: typeof beamsFor = beamsFor): RankedChoice[] {
   const haunchM = pretensioned.haunchM.value;
   const choices = beamCounts(task).flatMap((count) => {
     const layout = beamLayout(task.deck.widthM, count);
@@ -22,7 +22,7 @@ export function rankedChoices(task: UnitTask): RankedChoice[] {
       continuous: count > 2,
       uniform: true,
     });
-    return beamsFor(task.standard, task.depthM - slab.rootM - haunchM).map((shape) => ({
+    return shapesFor(task.standard, task.depthM - slab.rootM - haunchM).map((shape) => ({
       layout,
       slab,
       shape,

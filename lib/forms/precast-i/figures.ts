@@ -1,6 +1,7 @@
 import type { Descriptor } from '../../model/index.ts';
 import { formManual } from '../common/formManual.ts';
 import { precastManual } from '../common/precast/precastManual.ts';
+import { splicedManual } from './spliced/splicedFigures.ts';
 
 const { figure, sized } = formManual('precast-i');
 
@@ -41,5 +42,6 @@ export const precastIFigures: readonly Descriptor[] = [
     }),
     compute: ({ width, lines, spacing }) => (width - (lines - 1) * spacing) / 2,
   }),
+  ...splicedManual,
   ...precastManual('precast-i'),
 ];

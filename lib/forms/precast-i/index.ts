@@ -1,6 +1,7 @@
 import { sizePrecast } from '../common/precast/sizePrecast.ts';
 import type { FormModule } from '../formModule.ts';
 import { iBeams } from './iBeams.ts';
+import { mustBeSpliced, sizeSpliced } from './spliced/sizeSpliced.ts';
 
 /**
  * Precast pretensioned I and bulb-tee beams in one piece under a slab cast in place: each span carries its own weight and
@@ -14,5 +15,5 @@ export const precastI: FormModule = {
   name: 'Precast I-beams',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
-  size: (task) => sizePrecast(iBeams, task),
+  size: (task) => (mustBeSpliced(task) ? sizeSpliced(task) : sizePrecast(iBeams, task)),
 };

@@ -84,15 +84,15 @@ export function precastChecks(model: PrecastModel, beams: SizedBeams): Check[] {
   return checks;
 }
 
-/** The longest beam: its length, m, and mass, t. */
+/** The longest beam or piece: its length, m, and mass, t. */
 export function heaviestBeam(model: PrecastModel): { readonly lengthM: number; readonly massT: number } {
-  const lengthM = Math.max(...model.task.spansM);
+  const lengthM = model.pieceLengthM ?? Math.max(...model.task.spansM);
   const gamma = model.standard.unitWeights.concreteKNm3;
   return { lengthM, massT: (model.ownKNm * lengthM + gamma * beamSolidsM3(model, lengthM)) / 9.81 };
 }
 
 /** Deflection of the longest span under all lanes shared by all beams, and what the standard allows, m. */
-function deflection(model: PrecastModel): [demand: number, capacity: number] {
+export function deflection(model: PrecastModel): [demand: number, capacity: number] {
   const { task, beam, layout, standard, standardId } = model;
   const spanM = Math.max(...task.spansM);
   const span = task.spansM.indexOf(spanM);

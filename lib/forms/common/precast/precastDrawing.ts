@@ -5,7 +5,7 @@ import { deckFurniture } from '../furniture.ts';
 import { diaphragmsWithin } from './beamMoments.ts';
 import { pretensioned } from './pretensioned.ts';
 import type { PrecastModel } from './precastModel.ts';
-import type { SizedBeams } from './sizeBeams.ts';
+import type { StrandPlan } from './strandPlan.ts';
 
 type Point = readonly [x: number, z: number];
 
@@ -14,8 +14,11 @@ export function structuralDepthM(model: PrecastModel): number {
   return model.shape.depthM + model.haunchM + model.slab.rootM;
 }
 
+/** Height of the strands of a span above the soffit at midspan and at the ends, m. */
+type StrandLevels = Pick<StrandPlan, 'midM' | 'endM'>;
+
 /** The unit from the side: slab, beams span by span, their flanges, diaphragms and strands faint. */
-export function precastElevation(model: PrecastModel, beams: SizedBeams): Shape[] {
+export function precastElevation(model: PrecastModel, strands: readonly StrandLevels[]): Shape[] {
   const { shape, slab, haunchM, supportsM, lengthM } = model;
   const depthM = structuralDepthM(model);
   const whole = constantDepth(lengthM, depthM);
@@ -27,7 +30,7 @@ export function precastElevation(model: PrecastModel, beams: SizedBeams): Shape[
     shapes.push(deckFace('beam', 'concrete', along, topM));
     const flange = topM + shape.depthM - shape.bottomFlangeM;
     shapes.push({ ...levelLine('bottom flange', from, from + spanM, flange), faint: true });
-    shapes.push({ ...strandLine(model, span, beams), faint: true });
+    shapes.push({ ...strandLine(model, span, strands[span]!), faint: true });
     const count = diaphragmsWithin(model, spanM);
     for (let k = 1; k <= count; k++)
       shapes.push(
@@ -60,8 +63,7 @@ function levelLine(part: string, from: number, to: number, belowM: number): Shap
 }
 
 /** Middle line of the strands of a span. */
-function strandLine(model: PrecastModel, span: number, beams: SizedBeams): Shape {
-  const { plan } = beams.strands[span]!;
+function strandLine(model: PrecastModel, span: number, plan: StrandLevels): Shape {
   const from = model.supportsM[span]!;
   const spanM = model.task.spansM[span]!;
   const soffit = -structuralDepthM(model);

@@ -7,6 +7,7 @@ import { pretensioned } from './pretensioned.ts';
 import { beamSolidsM3 } from './beamSolids.ts';
 import type { PrecastModel } from './precastModel.ts';
 import type { SizedBeams } from './sizeBeams.ts';
+import type { StrandPlan } from './strandPlan.ts';
 
 /** Diaphragms cast between the beams, m3: at ends, at each inner support, within the spans. */
 export interface Diaphragms {
@@ -27,8 +28,13 @@ export function diaphragmM3(model: PrecastModel): Diaphragms {
   };
 }
 
+/** What is measured of sized beams: strands by span, links, bars over the piers. */
+export interface MeasuredBeams extends Pick<SizedBeams, 'shears' | 'piers'> {
+  readonly strands: readonly { readonly plan: Pick<StrandPlan, 'count'> }[];
+}
+
 /** Measured lines of the superstructure; `formworkM2` is that of the slab. */
-export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2: number): MeasuredLine[] {
+export function precastLines(model: PrecastModel, beams: MeasuredBeams, formworkM2: number): MeasuredLine[] {
   const { task, layout, shape, slab, lengthM, haunchM } = model;
   const { spansM } = task;
   const areaM2 = lengthM * task.deck.widthM;
@@ -128,7 +134,7 @@ export function precastLines(model: PrecastModel, beams: SizedBeams, formworkM2:
  */
 function torsionBarsKg(
   { torsion, task, standard, standardId }: PrecastModel,
-  { shears }: SizedBeams,
+  { shears }: MeasuredBeams,
 ): number {
   if (!torsion) return 0;
   const fy = barDesignMPa(standardId) * 1e3;

@@ -43,6 +43,8 @@ export interface PrecastModel extends BeamChoice {
   readonly wetKNm: number;
   readonly superimposedKNm: number;
   readonly diaphragmKN: number;
+  /** Longest piece that is hauled where it is not the longest span, m. */
+  readonly pieceLengthM?: number;
   /** What curvature in plan adds to slab, superimposed load and traffic of the outer beam; 1 on a straight. */
   readonly curve: number;
   readonly traffic: TrafficLoad;

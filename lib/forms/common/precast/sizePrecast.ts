@@ -48,7 +48,10 @@ export function sizePrecast(form: PrecastForm, task: UnitTask): Design {
     task,
     depthM: { support: depthM, midspan: depthM },
     depthAlong: constantDepth(model.lengthM, depthM),
-    elevation: precastElevation(model, beams),
+    elevation: precastElevation(
+      model,
+      beams.strands.map(({ plan }) => plan),
+    ),
     sections: precastSections(model, form.extraShapes?.(model) ?? []),
     reactions: precastReactions(model),
     checks,
