@@ -85,7 +85,8 @@ describe('precastI.size(task) past the length of the road', () => {
     const high = precastI.size({ ...task(spans, 2.5), clearUnderM: [22, 22, 22, 22] });
     const tower = (design: typeof low): number => quantityOf(design.lines, 'temporary-tower');
     expect(tower(high) / tower(low)).toBeCloseTo((22 - 2.5) / (12 - 2.5), 9);
-    const { clearUnderM: _, ...unknown } = task(spans, 2.5);
+    const { clearUnderM, ...unknown } = task(spans, 2.5);
+    expect(clearUnderM).toHaveLength(4);
     expect(precastI.size(unknown).warnings.join()).toMatch(/Height under the deck unknown/u);
   });
 
