@@ -30,7 +30,7 @@ const box = (frame: Frame, left: number, right: number, top: number, bottom: num
   `M${num(frame.x(left))},${num(frame.y(top))}H${num(frame.x(right))}V${num(frame.y(bottom))}H${num(frame.x(left))}Z`;
 
 /** Piles seen in elevation: as many as stand in one row along the road. */
-function pileRow(foundation: Foundation): number {
+export function pileRow(foundation: Foundation): number {
   const piles = foundation.piles;
   if (piles === null) return 0;
   const { lengthM, widthM } = foundation.footing;
@@ -262,9 +262,11 @@ export function substructure(
   return g(
     { class: 'substructure', fill: 'none', stroke: colours.ink },
     option.supports.map((support, index) =>
-      support.kind === 'abutment'
-        ? abutment(site, option, support, frame, style, index === 0 ? -1 : 1)
-        : pier(site, option, support, frame, style),
+      support.chainageM < frame.fromM || support.chainageM > frame.toM
+        ? null
+        : support.kind === 'abutment'
+          ? abutment(site, option, support, frame, style, index === 0 ? -1 : 1)
+          : pier(site, option, support, frame, style),
     ),
   );
 }

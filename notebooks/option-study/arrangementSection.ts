@@ -1,5 +1,7 @@
-import type { Appraisal } from '../../lib/index.ts';
+import type { Appraisal, Site } from '../../lib/index.ts';
+import { crossing } from '../drawing/crossing.ts';
 import { chooseReference, listenToStack, type ChooseReference } from '../drawing/listenToStack.ts';
+import { largestScale, pxPerMetre } from '../drawing/scale.ts';
 import { stack, stackOnPaper } from '../drawing/stack.ts';
 import { toDom } from '../drawing/toDom.ts';
 import { formLooks } from '../forms/formLook.ts';
@@ -58,7 +60,7 @@ function droppedTable(appraisal: Appraisal): HTMLElement {
 
 /** Section 3: every option drawn on one chainage and one scale, with its cost beside it. */
 export function arrangementSection(page: Sheet, store: StudyStore, cells: StudyCells): LineSection {
-  const { appraisal, reference, brief } = cells;
+  const { appraisal, reference, brief, site } = cells;
   const finding = page.live({ appraisal }, (v) => {
     const kept = v.appraisal.options.length;
     const dropped = droppedTotal(v.appraisal);
@@ -107,5 +109,47 @@ export function arrangementSection(page: Sheet, store: StudyStore, cells: StudyC
         return [drawing, droppedTable(v.appraisal)];
       },
     }),
+    page.cell({
+      station: '3+030',
+      title: 'Main opening at a larger scale',
+      shows: { reference, brief, site },
+      wide: true,
+      body: (v, room) => {
+        const { site, reference: option } = v;
+        if (!option || !site.mainOpening) {
+          return h(
+            'p',
+            { class: 'prose' },
+            'Nothing is barred to supports: there is no opening to look at closely.',
+          );
+        }
+        const { scale, window } = closeUp(site, room.widthPx);
+        return crossing({
+          site,
+          option,
+          obstacles: v.brief.obstacles,
+          widthPx: room.widthPx,
+          scale,
+          window,
+          band: room.widthPx >= 700,
+          prefix: 'close-up',
+        });
+      },
+    }),
   ]);
+}
+
+/** Ground shown on either side of the main opening, m. */
+const BESIDE_OPENING_M = 25;
+
+/** Scale and stretch of a drawing that shows the widest opening with the supports beside it. */
+function closeUp({ mainOpening, startM, endM }: Site, widthPx: number) {
+  const { fromM, toM } = mainOpening!;
+  const scale = largestScale(Math.min(endM - startM, toM - fromM + 2 * BESIDE_OPENING_M), widthPx - 20, 500);
+  const half = widthPx / pxPerMetre(scale) / 2;
+  const middle = (fromM + toM) / 2;
+  return {
+    scale,
+    window: { fromM: Math.max(startM - 15, middle - half), toM: Math.min(endM + 15, middle + half) },
+  };
 }

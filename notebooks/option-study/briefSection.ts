@@ -1,5 +1,6 @@
 import type { Brief } from '../../lib/index.ts';
 import { crossing } from '../drawing/crossing.ts';
+import { plan } from '../drawing/plan.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
@@ -69,6 +70,20 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
             'Last rows of the band: the lowest soffit that headroom, flood and freeboard allow, and what is spare.',
           ),
           h('p', { class: 'source' }, 'Founding shown for the likeliest ground of each stretch.'),
+        ],
+      }),
+      page.cell({
+        station: '1+025',
+        title: 'Plan',
+        shows: { site, reference },
+        body: (v, room) =>
+          plan({ site: v.site, option: v.reference, widthPx: room.widthPx, prefix: 'plan', bar: true }),
+        notes: [
+          h(
+            'p',
+            {},
+            'Supports and what is crossed stand at the skew of the crossing. Hidden lines: shafts, footings, piles.',
+          ),
         ],
       }),
       page.cell({

@@ -19,6 +19,7 @@ import { label } from '../../notebooks/drawing/label.ts';
 import { ladder } from '../../notebooks/drawing/ladder.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { el, g } from '../../notebooks/drawing/piece.ts';
+import { plan } from '../../notebooks/drawing/plan.ts';
 import { section } from '../../notebooks/drawing/section.ts';
 import { sectionRow } from '../../notebooks/drawing/sectionRow.ts';
 import { sheet } from '../../notebooks/drawing/sheet.ts';
@@ -97,6 +98,9 @@ export const sheets: Readonly<Record<string, () => Piece>> = {
       scale: 500,
       window: { fromM: 1300, toM: 1420 },
     }),
+  plan: () => plan({ site, option: second, widthPx: 980, bar: true }),
+  'plan-bare': () => plan({ site, option: null, widthPx: 980 }),
+  'plan-black': () => plan({ site, option: third, widthPx: 980, paper: 'black', scale: 500 }),
   ...Object.fromEntries(
     options.map((option) => [`elevation-${option.form}`, () => elevation({ site, option, widthPx: 980 })]),
   ),
