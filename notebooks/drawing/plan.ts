@@ -295,7 +295,8 @@ export function plan(input: PlanInput): Piece {
             figure: 'site/deck/widthM',
           }),
       words !== '' && label(0, 11, words, { fill: colours.second }),
-      withBar && scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 26, { rightPx: widthPx, heights: false }),
+      withBar &&
+        scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 26, { rightPx: widthPx, heights: false }),
     ],
   );
 }
