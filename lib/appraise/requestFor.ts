@@ -19,9 +19,13 @@ function spanBand(form: FormId, site: Site): Pick<Windows, 'minSpanM' | 'maxSpan
 }
 
 function continuousWindows(form: FormId, site: Site): Windows {
+  const { pattern } = formModule(form);
+  const mostSpans = pattern.kind === 'continuous' ? pattern.mostSpans : undefined;
+  // A unit of one span has no end spans.
+  if (mostSpans === 1) return { ...spanBand(form, site), mostSpans };
   const endRatio = endRatioWindow(form);
   if (endRatio === null) throw new RangeError(`no end span window in the rules of ${form}`);
-  return { ...spanBand(form, site), endRatio };
+  return { ...spanBand(form, site), endRatio, ...(mostSpans === undefined ? {} : { mostSpans }) };
 }
 
 /**

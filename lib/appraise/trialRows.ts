@@ -36,6 +36,7 @@ function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number
   const pattern = formModule(form).pattern;
   if (pattern.kind === 'simple-main') return { spansM: [spanM] };
   if (pattern.kind === 'continuous') {
+    if (pattern.mostSpans === 1) return { spansM: [spanM] };
     return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
   }
   const [least, most] =

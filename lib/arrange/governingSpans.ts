@@ -50,7 +50,8 @@ export function mostSpans(task: UnitTask, governingM: number): number {
   const { limits, X, lastEnd } = task;
   const lengthM = X[lastEnd]!;
   const interior = Math.max(limits.minSpacingM, limits.interiorLeast * governingM);
-  const ever = Math.max(2, Math.floor(2 + (lengthM - 2 * limits.minSpacingM) / interior + SLACK));
+  const room = Math.max(2, Math.floor(2 + (lengthM - 2 * limits.minSpacingM) / interior + SLACK));
+  const ever = Math.min(limits.mostSpans, room);
   if (isFull(task)) return ever;
   return Math.min(ever, fewestSpans(limits, lengthM, governingM) + MORE_SPANS);
 }

@@ -8,6 +8,7 @@ export interface Limits {
   readonly endMost: number;
   readonly interiorLeast: number;
   readonly minSpacingM: number;
+  readonly mostSpans: number;
 }
 
 /** Slack with which ratios and spans are compared. */
@@ -31,11 +32,13 @@ export function limitsOf(windows: Windows): Limits {
     endMost,
     interiorLeast: windows.interiorLeast ?? Math.min(endLeast, 1),
     minSpacingM: windows.minSpacingM ?? Math.min(endLeast, 1) * minSpanM,
+    mostSpans: windows.mostSpans ?? Infinity,
   };
 }
 
 export type Fault =
   | 'span outside the band of the form'
+  | 'more spans than the form has'
   | 'end span outside its window'
   | 'interior span too short for its neighbours';
 
@@ -44,6 +47,7 @@ export function spanFault(spans: readonly number[], limits: Limits): Fault | nul
   const longest = Math.max(...spans);
   const slack = SLACK * longest + 1e-6;
   const shortest = Math.min(...spans);
+  if (spans.length > limits.mostSpans) return 'more spans than the form has';
   if (!(longest >= limits.minSpanM - slack && longest <= limits.maxSpanM + slack))
     return 'span outside the band of the form';
   if (spans.length === 1) return null;

@@ -44,6 +44,7 @@ function firstTwo(layers: Layers, F: Float64Array): void {
     const reached = deck + half.A[x]! + half.B[x]! * s;
     if (!isTooDear(layers, reached, s)) F[x] = reached;
   }
+  if (layers.K < 2) return;
   let low = 1;
   for (let end = firstEnd; end <= lastEnd; end += 1) {
     const xe = X[end]!;

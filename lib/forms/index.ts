@@ -6,6 +6,7 @@ import { compositeBox } from './composite-box/index.ts';
 import { compositeI } from './composite-i/index.ts';
 import { concreteBox } from './concrete-box/index.ts';
 import type { FormModule } from './formModule.ts';
+import { portalFrame } from './portal-frame/index.ts';
 import { slab } from './slab/index.ts';
 import { halfThrough } from './half-through/index.ts';
 import { precastI } from './precast-i/index.ts';
@@ -18,6 +19,7 @@ export type { FormModule, Pattern } from './formModule.ts';
 /** Every form the tool can size, by id. Adding a form is one line here beside its folder. */
 export const forms: Readonly<Partial<Record<FormId, FormModule>>> = {
   slab,
+  'portal-frame': portalFrame,
   'precast-i': precastI,
   'precast-trough': precastTrough,
   'adjacent-box': adjacentBox,

@@ -72,6 +72,15 @@ export {
   type TrussGeometry,
 } from './members/planeTruss.ts';
 export {
+  frameEffects,
+  planeFrame,
+  type FrameEffects,
+  type FrameFoot,
+  type FrameGeometry,
+  type FrameLoad,
+  type PlaneFrame,
+} from './members/planeFrame.ts';
+export {
   catenary,
   catenaryCheck,
   ernstModulus,

@@ -87,6 +87,29 @@ export interface SupportReaction {
   readonly trafficMinKN: number;
 }
 
+/**
+ * A wall in one with the deck at an end of a unit, instead of an abutment: its concrete and bars stand in the lines of the
+ * design down to the top of its foundation, which is sized for `loads` on every ground.
+ */
+export interface IntegralWall {
+  /** Which support of the unit, 0-based. */
+  readonly support: number;
+  /** Thickness at the foot along the road, m. */
+  readonly footM: number;
+  /** From the top of the structural slab to the top of the foundation, m. */
+  readonly heightM: number;
+  readonly concreteM3: number;
+  readonly reinforcementKg: number;
+  /** Movement of the end of the deck from warm to cold with shrinkage, mm. */
+  readonly movementMm: number;
+  /** Characteristic loads on the foundation, kN and kNm, pressure of the fill on the wall included; along and moment positive towards the span. */
+  readonly loads: readonly {
+    readonly verticalKN: number;
+    readonly alongKN: number;
+    readonly momentKNm: number;
+  }[];
+}
+
 /** A sized unit. */
 export interface Design {
   readonly task: UnitTask;
@@ -96,6 +119,8 @@ export interface Design {
   readonly elevation: readonly Shape[];
   readonly sections: readonly SectionCut[];
   readonly reactions: readonly SupportReaction[];
+  /** Walls in one with the deck; absent where it rests on bearings. */
+  readonly walls?: readonly IntegralWall[];
   readonly checks: readonly Check[];
   /** The check with the highest utilisation. */
   readonly limitingCheck: Check;

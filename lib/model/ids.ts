@@ -29,10 +29,10 @@ export type FormId = (typeof formIds)[number];
 /** The family each form belongs to. */
 export const familyOf: Readonly<Record<FormId, Family>> = {
   slab: 'slab',
-  'portal-frame': 'slab',
+  'portal-frame': 'girder',
   'precast-i': 'girder',
   'precast-trough': 'girder',
-  'adjacent-box': 'girder',
+  'adjacent-box': 'box',
   'half-through': 'girder',
   'composite-i': 'girder',
   'composite-box': 'box',

@@ -2,8 +2,8 @@ import type { FormId } from './ids.ts';
 
 /** How the spans of a form may be laid out. Windows (ratios, span bands) are rules and live in `data/rules`. */
 export type Pattern =
-  /** One continuous unit, abutment to abutment. */
-  | { readonly kind: 'continuous' }
+  /** One continuous unit, abutment to abutment, of at most `mostSpans` spans where that is given. */
+  | { readonly kind: 'continuous'; readonly mostSpans?: number }
   /** A main unit of one simple span over the obstacle; approach units of another form on either side where needed. */
   | { readonly kind: 'simple-main'; readonly approach: FormId }
   /**

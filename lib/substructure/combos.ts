@@ -6,6 +6,8 @@ export interface Combo {
   readonly verticalKN: number;
   readonly alongKN: number;
   readonly alongLevelM: number;
+  /** Moment in the plane of the road at `alongLevelM`, positive towards the span for an abutment; none unless given. */
+  readonly momentAlongKNm?: number;
   readonly acrossKN: number;
   readonly acrossLevelM: number;
   /** Factor on allowable ground and pile loads: 1, or more for accidental loads. */
@@ -21,6 +23,8 @@ export interface Backfill {
   readonly widthM: number;
   /** Share of the plan outside the stem that lies behind it, under the soil. */
   readonly heelShare: number;
+  /** True where the wall is held at both ends, so that the loads on the foundation have the pressure of the soil in them. */
+  readonly inLoads?: true;
 }
 
 /** Loads of a combination brought down to one level: V, H and M in kN and kNm. */
@@ -38,7 +42,7 @@ export function resultantAt(combo: Combo, levelM: number): Resultant {
     verticalKN: combo.verticalKN,
     alongKN: combo.alongKN,
     acrossKN: combo.acrossKN,
-    momentAlongKNm: combo.alongKN * Math.max(0, combo.alongLevelM - levelM),
+    momentAlongKNm: (combo.momentAlongKNm ?? 0) + combo.alongKN * Math.max(0, combo.alongLevelM - levelM),
     momentAcrossKNm: combo.acrossKN * Math.max(0, combo.acrossLevelM - levelM),
   };
 }

@@ -63,15 +63,16 @@ export function demandAt(
     const cover = (plan - shaftPlan) * coverM * soilOver(task.waterLevelM, topM);
     return { ...loads, verticalKN: loads.verticalKN + own + cover };
   }
-  const { topLevelM, widthM: wallM, heelShare } = task.backfill;
+  const { topLevelM, widthM: wallM, heelShare, inLoads } = task.backfill;
   const outside = Math.max(0, lengthM - task.shaftLengthM);
   const heel = heelShare * outside;
   const toe = outside - heel;
   const soilHeight = Math.max(0, topLevelM - topM);
   const soil = heel * wallM * soilHeight * footing.soilKNm3;
   const height = Math.max(0, topLevelM - undersideM);
-  const earth = (abutment.activePressure * footing.soilKNm3 * height * height * wallM) / 2;
-  const surcharge = abutment.activePressure * abutment.surchargeKPa * height * wallM;
+  const pressure = inLoads ? 0 : abutment.activePressure;
+  const earth = (pressure * footing.soilKNm3 * height * height * wallM) / 2;
+  const surcharge = pressure * abutment.surchargeKPa * height * wallM;
   // Distances from the middle of the plan, positive towards the span.
   const stemAt = lengthM / 2 - toe - task.shaftLengthM / 2;
   const heelAt = -(lengthM / 2 - heel / 2);

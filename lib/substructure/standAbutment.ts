@@ -7,6 +7,7 @@ import { groundUnder } from './groundUnder.ts';
 import { scourDepth, settingAt } from './setting.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import { articulationLines, bearingLoadMN, line, upliftKN, waterAccessLines } from './supportLines.ts';
+import { wingFootingLines, wingsOf, wingWallsLine, type Wings } from './wings.ts';
 
 /** Walls of an abutment, m and m3. */
 interface Walls {
@@ -14,8 +15,7 @@ interface Walls {
   readonly stemLengthM: number;
   readonly stemM3: number;
   readonly backWallM3: number;
-  readonly wingsM3: number;
-  readonly wingFootingsM3: number;
+  readonly wings: Wings;
 }
 
 /**
@@ -39,8 +39,8 @@ export function standAbutment(site: Site, ask: SupportAsk): Support {
     lengthM: walls.stemLengthM,
     widthM: site.deck.widthM,
     columns: 1,
-    concreteM3: walls.stemM3 + walls.backWallM3 + walls.wingsM3,
-    reinforcementKg: (walls.stemM3 + walls.backWallM3 + walls.wingsM3) * abutment.barsKgM3,
+    concreteM3: walls.stemM3 + walls.backWallM3 + walls.wings.wallsM3,
+    reinforcementKg: (walls.stemM3 + walls.backWallM3 + walls.wings.wallsM3) * abutment.barsKgM3,
   };
   const weightKN = (walls.stemM3 + walls.backWallM3) * concrete.weightKNm3;
   const task: FoundationTask = {
@@ -95,22 +95,19 @@ function wallsOf(site: Site, ask: SupportAsk, seatM: number, footM: number, kind
   const height = Math.max(0, ask.roadLevelM - footM);
   const footThickness = Math.max(abutment.leastStemM, abutment.stemPerHeight * height);
   const stemLengthM = kind === 'bank seat' ? abutment.leastStemM : (abutment.leastStemM + footThickness) / 2;
-  const wingLength = site.road.fillSideSlope * height;
   return {
     kind,
     stemLengthM,
     stemM3: stemLengthM * stemHeight * width,
     backWallM3: Math.max(0, ask.roadLevelM - seatM) * abutment.backWallM * width,
-    wingsM3: 2 * wingLength * abutment.wingMeanHeight * height * abutment.wingM,
-    wingFootingsM3: 2 * wingLength * abutment.wingFootingWidth * height * abutment.wingFootingM,
+    wings: wingsOf(site, height),
   };
 }
 
 function wallLines(ask: SupportAsk, walls: Walls): MeasuredLine[] {
   const { barsKgM3 } = substructureData.abutment;
-  const footingBars = substructureData.footing.barsKgM3;
   const wall = walls.stemM3 + walls.backWallM3;
-  const bars = (wall + walls.wingsM3) * barsKgM3;
+  const bars = (wall + walls.wings.wallsM3) * barsKgM3;
   const name = ask.name;
   return [
     line(
@@ -121,24 +118,9 @@ function wallLines(ask: SupportAsk, walls: Walls): MeasuredLine[] {
       `${name} ${walls.kind}`,
       `stem ${walls.stemLengthM.toFixed(2)} m thick, back wall`,
     ),
-    line(
-      ask,
-      'abutments',
-      'abutment-concrete',
-      walls.wingsM3,
-      `${name} wing walls`,
-      'two, as long as the side slope',
-    ),
+    wingWallsLine(ask, walls.wings),
     line(ask, 'abutments', 'reinforcement', bars, `${name} walls`, `${barsKgM3} kg/m3`),
-    line(ask, 'abutments', 'footing-concrete', walls.wingFootingsM3, `${name} wing footings`, 'by height'),
-    line(
-      ask,
-      'abutments',
-      'reinforcement',
-      walls.wingFootingsM3 * footingBars,
-      `${name} wing footings`,
-      `${footingBars} kg/m3`,
-    ),
+    ...wingFootingLines(ask, walls.wings),
   ];
 }
 

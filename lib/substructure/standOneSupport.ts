@@ -1,5 +1,6 @@
 import type { Site, Support } from '../model/index.ts';
 import { standAbutment } from './standAbutment.ts';
+import { standIntegralWall } from './standIntegralWall.ts';
 import { standPier } from './standPier.ts';
 import type { SupportAsk } from './supportAsk.ts';
 
@@ -24,5 +25,6 @@ export function standOneSupport(site: Site, ask: SupportAsk): Support {
       );
     }
   }
+  if (ask.integral) return standIntegralWall(site, ask, ask.integral);
   return ask.kind === 'abutment' ? standAbutment(site, ask) : standPier(site, ask);
 }

@@ -73,7 +73,10 @@ function askAt(
     meetings.reduce((sum, { design, at }) => sum + design.reactions[at]![key], 0);
   const carrier = meetings.find(({ design, at }) => design.task.pylons?.includes(at));
   const pylon = carrier ? { pylon: pylonFoot(carrier.design, roadLevelM - groundAt(site, chainageM)) } : {};
-  const joint = end || meetings.length > 1;
+  const integral = meetings
+    .flatMap(({ design, at }) => design.walls?.filter(({ support }) => support === at) ?? [])
+    .at(0);
+  const joint = integral === undefined && (end || meetings.length > 1);
   const loads = {
     permanentKN: reaction('permanentKN'),
     trafficKN: reaction('trafficMaxKN'),
@@ -91,14 +94,16 @@ function askAt(
     soffitLevelM: roadLevelM - constructionDepth(site.deck, deepest),
     ...loads,
     // Fixed points of two units add; sliding bearings of two units push apart, so the larger counts.
-    alongKN:
-      fixed.length > 0
+    alongKN: integral
+      ? Math.max(...integral.loads.map(({ alongKN }) => Math.abs(alongKN)))
+      : fixed.length > 0
         ? fixed.reduce((sum, { hold }) => sum + hold.alongKN, 0)
         : Math.max(...meetings.map(({ hold }) => hold.alongKN)),
     acrossKN: meetings.reduce((sum, { hold }) => sum + hold.acrossKN, 0),
-    fixed: fixed.length > 0,
-    bearings: meetings.length * substructureData.bearings.perLine,
+    fixed: integral !== undefined || fixed.length > 0,
+    bearings: integral ? 0 : meetings.length * substructureData.bearings.perLine,
     jointMovementMm: joint ? meetings.reduce((sum, { hold }) => sum + hold.movementMm, 0) : 0,
     ...pylon,
+    ...(integral ? { integral } : {}),
   };
 }

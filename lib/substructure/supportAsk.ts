@@ -1,4 +1,4 @@
-import type { Support } from '../model/index.ts';
+import type { IntegralWall, Support } from '../model/index.ts';
 
 /** What one support is asked to carry: nothing here knows the form. Loads characteristic, kN. */
 export interface SupportAsk {
@@ -23,6 +23,8 @@ export interface SupportAsk {
   readonly fixed: boolean;
   readonly bearings: number;
   readonly jointMovementMm: number;
+  /** Wall in one with the deck, measured with it; its loads stand for all others but wind. */
+  readonly integral?: IntegralWall;
   /** Pylon only: its own weight, kN, its height above its foot, m, and the plan it stands on, m. */
   readonly pylon?: {
     readonly weightKN: number;

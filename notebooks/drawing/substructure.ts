@@ -177,6 +177,15 @@ function fillStrokes(site: Site, option: AppraisedOption, frame: Frame, fromM: n
   return d;
 }
 
+/** Level of the foot of a wall that is drawn with its deck; null where the end of the deck rests on an abutment. */
+function footOfWall(site: Site, option: AppraisedOption, chainageM: number): number | null {
+  for (const { design, unit } of placedUnits(option)) {
+    const wall = design.walls?.find((one) => unit.supportsM[one.support] === chainageM);
+    if (wall) return slabLevel(site, option, chainageM) - wall.heightM;
+  }
+  return null;
+}
+
 function abutment(
   site: Site,
   option: AppraisedOption,
@@ -192,7 +201,8 @@ function abutment(
   const seat = support.topLevelM;
   const road = roadLevel(site, option, at);
   // Away from the bridge is `side`; the back wall stands behind the bearings, the wing reaches back to where its slope meets the road.
-  const front = at - side * Math.min(0.8, thick / 2);
+  const wallFoot = footOfWall(site, option, at);
+  const front = at - side * (wallFoot === null ? Math.min(0.8, thick / 2) : thick / 2);
   const back = front + side * thick;
   const wall = back - side * 0.5;
   const height = Math.max(0, road - Math.max(support.groundLevelM, foot));
@@ -235,8 +245,19 @@ function abutment(
       stroke: colours.second,
       'stroke-width': pens.fine,
     }),
-    el('path', { d: pathOf(points, true), fill: colours.sheet, 'stroke-width': pens.thin }),
-    soffit > seat + 0.05 &&
+    wallFoot === null &&
+      el('path', { d: pathOf(points, true), fill: colours.sheet, 'stroke-width': pens.thin }),
+    // A wall in one with the deck is drawn with it; what goes on below its foot is drawn here.
+    wallFoot !== null &&
+      style.foundations !== false &&
+      wallFoot > foot + 0.02 &&
+      el('path', {
+        d: box(frame, Math.min(front, back), Math.max(front, back), wallFoot, foot),
+        fill: colours.sheet,
+        'stroke-width': pens.thin,
+      }),
+    wallFoot === null &&
+      soffit > seat + 0.05 &&
       el('path', { d: box(frame, at - 0.4, at + 0.4, soffit, seat), fill: colours.ink, stroke: 'none' }),
     // The road goes on behind the abutment, on the fill or on the ground.
     el('path', {

@@ -110,7 +110,7 @@ function solidOver({ spansM, depthM }: UnitTask, outline: SlabOutline): number[]
 }
 
 /** Least thickness at the root of the wings in steps of 10 mm at which their bars stay within a practical ratio. */
-function wingRoot(
+export function wingRoot(
   task: UnitTask,
   standard: LoadStandard,
 ): { readonly rootM: number; readonly barsM2PerM: number } {

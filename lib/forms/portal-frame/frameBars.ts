@@ -1,0 +1,282 @@
+import { barDesignMPa } from '../common/bars.ts';
+import { slabData } from '../common/slab/slabData.ts';
+import { bendingCapacity, compressionDepth, strandDesignMPa } from '../concrete-box/bendingCapacity.ts';
+import { serviceBars } from '../slab/crackedSection.ts';
+import { slabDeckData } from '../slab/slabDeckData.ts';
+import { combinations, worstMoment, type Combination, type Combined } from './combine.ts';
+import { wallNodes, type FrameModel } from './frameModel.ts';
+import type { FrameTendons } from './frameTendons.ts';
+import type { FrameTraffic } from './frameTraffic.ts';
+import { portalData } from './portalData.ts';
+
+/** Main bars of one face of one part, along the chain. */
+export interface FaceBars {
+  readonly id: 'soffit' | 'top' | 'first-outer' | 'first-inner' | 'last-outer' | 'last-inner';
+  readonly nodes: readonly number[];
+  /** 1 the inner face (soffit), -1 the outer. */
+  readonly sign: 1 | -1;
+  readonly barM: number;
+  /** Needed at the nodes over the whole width, m2, and placed. */
+  readonly needM2: Float64Array;
+  readonly placedM2: Float64Array;
+  /** Greatest need over what fits, and where. */
+  readonly use: number;
+  readonly worst: number;
+  readonly fitsM2: number;
+  /** Design moment where it is used most, and what the most bars that fit carry there, kNm. */
+  readonly designKNm: number;
+  readonly capacityKNm: number;
+  /** Steel, m3. */
+  readonly volumeM3: number;
+}
+
+/** Width of a face and of the one opposite at a node, with the depth of the bars, m. */
+interface Strip {
+  readonly widthM: number;
+  readonly pressedM: number;
+  readonly depthM: number;
+  /** Centroid from the pressed face. */
+  readonly centroidM: number;
+  readonly effectiveM: number;
+}
+
+/**
+ * Bars of both faces of deck and walls: at the ultimate limit with the thrust that comes with each moment, and in service
+ * for stress and cracks where nothing is prestressed; the smallest size that fits.
+ */
+export function frameBars(
+  model: FrameModel,
+  traffic: FrameTraffic,
+  tendons: FrameTendons | null,
+): FaceBars[] {
+  const parasitic = tendons?.parasitic ?? null;
+  const ultimate = combinations(model, traffic, 'ultimate', parasitic);
+  const characteristic = combinations(model, traffic, 'characteristic', parasitic);
+  const frequent = combinations(model, traffic, 'frequent', parasitic);
+  const { knees } = model.shape;
+  const deck = Array.from({ length: knees[1] - knees[0] - 1 }, (_, i) => knees[0] + 1 + i);
+  const first = wallNodes(model.shape, 0);
+  const last = wallNodes(model.shape, 1);
+  const face = (id: FaceBars['id'], nodes: readonly number[], sign: 1 | -1): FaceBars =>
+    faceBars(model, id, nodes, sign, [ultimate, characteristic, frequent], tendons);
+  return [
+    face('soffit', deck, 1),
+    face('top', deck, -1),
+    face('first-outer', first, -1),
+    face('first-inner', first, 1),
+    face('last-outer', last, -1),
+    face('last-inner', last, 1),
+  ];
+}
+
+type Limits = readonly [ultimate: Combination[], characteristic: Combination[], frequent: Combination[]];
+
+function faceBars(
+  model: FrameModel,
+  id: FaceBars['id'],
+  nodes: readonly number[],
+  sign: 1 | -1,
+  [ultimate, characteristic, frequent]: Limits,
+  tendons: FrameTendons | null,
+): FaceBars {
+  const { bars } = slabDeckData;
+  const inDeck = id === 'soffit' || id === 'top';
+  const stressed = inDeck ? tendons : null;
+  const at = (list: Combination[], node: number): Combined[] =>
+    list.map((combination) => worstMoment(combination, node, sign));
+  const ult = nodes.map((node) => at(ultimate, node));
+  const chr = stressed ? [] : nodes.map((node) => at(characteristic, node));
+  const frq = stressed ? [] : nodes.map((node) => at(frequent, node));
+  let found: FaceBars | null = null;
+  for (const barM of bars.sizesM) {
+    const needM2 = new Float64Array(nodes.length);
+    let worst = 0;
+    let use = 0;
+    nodes.forEach((node, i) => {
+      const strip = stripOf(model, node, sign, barM, inDeck);
+      for (const [k, loads] of ult[i]!.entries()) {
+        needM2[i] = Math.max(needM2[i]!, ultimateBars(model, strip, loads, node, sign, stressed));
+        if (!stressed)
+          needM2[i] = Math.max(needM2[i]!, crackBars(model, strip, barM, frq[i]![k]!, chr[i]![k]!));
+      }
+      const here = needM2[i]! / fits(strip, barM);
+      if (here > use) {
+        use = here;
+        worst = i;
+      }
+    });
+    const strip = stripOf(model, nodes[worst]!, sign, barM, inDeck);
+    const design = ult[worst]!.reduce((a, b) => (b.momentKNm > a.momentKNm ? b : a));
+    const placedM2 = placed(model, nodes, needM2, strip, barM, id === 'top');
+    found = {
+      id,
+      nodes,
+      sign,
+      barM,
+      needM2,
+      placedM2,
+      use,
+      worst: nodes[worst]!,
+      fitsM2: fits(strip, barM),
+      designKNm: Math.max(0, design.momentKNm),
+      capacityKNm: capacity(model, strip, design, barM, nodes[worst]!, sign, stressed),
+      volumeM3: volume(model, nodes, placedM2, strip, barM),
+    };
+    if (use <= bars.closestM / bars.usualM / portalData.bars.layers) break;
+  }
+  return found!;
+}
+
+/** Most bars of a size in a face: layers at the closest spacing. */
+function fits({ widthM }: Strip, barM: number): number {
+  return (portalData.bars.layers * widthM * Math.PI * barM ** 2) / 4 / slabDeckData.bars.closestM;
+}
+
+function stripOf(model: FrameModel, node: number, sign: 1 | -1, barM: number, inDeck: boolean): Strip {
+  const section = model.shape.sections[node]!;
+  const { depthM, outerM, outerWidthM, innerWidthM } = section;
+  // Walls and deck meet with bars of both crossing at the knee.
+  const axisM = slabDeckData.bars.coverM + (inDeck ? 0.5 : 1) * barM;
+  return {
+    widthM: sign > 0 ? innerWidthM : outerWidthM,
+    pressedM: sign > 0 ? outerWidthM : innerWidthM,
+    depthM,
+    centroidM: sign > 0 ? outerM : depthM - outerM,
+    effectiveM: depthM - axisM,
+  };
+}
+
+/** Tendons of a node as seen from the pressed face: area, m2, and depth, m. */
+function strandsAt(
+  node: number,
+  sign: 1 | -1,
+  depthM: number,
+  tendons: FrameTendons | null,
+): { readonly strandM2: number; readonly strandDepthM: number } {
+  if (!tendons) return { strandM2: 0, strandDepthM: 0 };
+  const level = tendons.levelM[node]!;
+  return { strandM2: tendons.areaM2, strandDepthM: sign > 0 ? level : depthM - level };
+}
+
+const pressedFace = ({ pressedM, depthM }: Strip) => ({ widthM: pressedM, flangeM: depthM, websM: pressedM });
+
+/** As fyd (d - c) = M - N (cg - c) - Ap fpd (dp - c), c the middle of the stress block under all of them. */
+function ultimateBars(
+  model: FrameModel,
+  strip: Strip,
+  { momentKNm, thrustKN }: Combined,
+  node: number,
+  sign: 1 | -1,
+  tendons: FrameTendons | null,
+): number {
+  if (!(momentKNm > 0)) return 0;
+  const strength = barDesignMPa(model.standardId) * 1e3;
+  const { strandM2, strandDepthM } = strandsAt(node, sign, strip.depthM, tendons);
+  const strandKN = strandM2 * (tendons ? strandDesignMPa(model) * 1e3 : 0);
+  let areaM2 = 0;
+  for (let pass = 0; pass < 5; pass++) {
+    const force = Math.max(0, areaM2 * strength + strandKN + thrustKN);
+    const c = Math.min(0.2 * strip.effectiveM, compressionDepth(model, pressedFace(strip), force));
+    areaM2 = Math.max(
+      0,
+      (momentKNm - thrustKN * (strip.centroidM - c) - strandKN * Math.max(0, strandDepthM - c)) /
+        (strength * (strip.effectiveM - c)),
+    );
+  }
+  return areaM2;
+}
+
+/** Bars for stress and cracks; a thrust takes its part of the moment off the bars. */
+function crackBars(
+  model: FrameModel,
+  strip: Strip,
+  barM: number,
+  frequent: Combined,
+  characteristic: Combined,
+): number {
+  const { widthM, depthM, centroidM, effectiveM } = strip;
+  const perM = ({ momentKNm, thrustKN }: Combined): number =>
+    (momentKNm - thrustKN * (centroidM - (1 - slabData.leverRatio.value) * effectiveM)) / widthM;
+  return (
+    widthM *
+    serviceBars(
+      { depthM, effectiveM, barM },
+      { frequentKNm: perM(frequent), characteristicKNm: perM(characteristic) },
+      model.standardId,
+      model.concrete,
+    )
+  );
+}
+
+function capacity(
+  model: FrameModel,
+  strip: Strip,
+  { thrustKN }: Combined,
+  barM: number,
+  node: number,
+  sign: 1 | -1,
+  tendons: FrameTendons | null,
+): number {
+  const steel = {
+    ...strandsAt(node, sign, strip.depthM, tendons),
+    barM2: fits(strip, barM),
+    barDepthM: strip.effectiveM - ((portalData.bars.layers - 1) / 2) * 2 * barM,
+  };
+  const c = compressionDepth(model, pressedFace(strip), Math.max(0, thrustKN));
+  return bendingCapacity(model, steel, pressedFace(strip)) + thrustKN * (strip.centroidM - c);
+}
+
+/** Place of a node along its part, m. */
+function along(model: FrameModel, node: number): number {
+  let s = 0;
+  for (let e = 0; e < node; e++) s += model.memberM[e]!;
+  return s;
+}
+
+/**
+ * Bars as placed: the least of a slab everywhere, half of the peak where more is needed and all of it where more than half
+ * is, run on by the effective depth and an anchorage; the top of the deck apart for each knee.
+ */
+function placed(
+  model: FrameModel,
+  nodes: readonly number[],
+  needM2: Float64Array,
+  { effectiveM }: Strip,
+  barM: number,
+  halves: boolean,
+): Float64Array {
+  const s = nodes.map((node) => along(model, node));
+  const least = nodes.map((node) => {
+    const { depthM, outerWidthM, innerWidthM } = model.shape.sections[node]!;
+    return slabData.steelRatioLeast.value * depthM * Math.min(outerWidthM, innerWidthM);
+  });
+  const out = Float64Array.from(least);
+  const runOnM = effectiveM + slabDeckData.bars.anchorDiameters * barM;
+  const middle = nodes.length >> 1;
+  const groups = halves ? [nodes.slice(0, middle + 1), nodes.slice(middle)] : [nodes];
+  for (const group of groups) {
+    const index = group.map((node) => nodes.indexOf(node));
+    const peak = Math.max(...index.map((i) => needM2[i]!));
+    nodes.forEach((_, i) => {
+      let most = 0;
+      for (const k of index) if (Math.abs(s[k]! - s[i]!) <= runOnM) most = Math.max(most, needM2[k]!);
+      if (most > least[i]!) out[i] = Math.max(out[i]!, most > peak / 2 ? peak : peak / 2);
+    });
+  }
+  return out;
+}
+
+/** Steel of the placed bars with their ends run into the neighbouring part. */
+function volume(
+  model: FrameModel,
+  nodes: readonly number[],
+  placedM2: Float64Array,
+  { depthM }: Strip,
+  barM: number,
+): number {
+  let sum = 0;
+  for (let i = 0; i < nodes.length - 1; i++)
+    sum += ((placedM2[i]! + placedM2[i + 1]!) / 2) * model.memberM[nodes[i]!]!;
+  const anchorM = slabDeckData.bars.anchorDiameters * barM + depthM / 2;
+  return sum + (placedM2[0]! + placedM2[placedM2.length - 1]!) * anchorM;
+}

@@ -1,0 +1,207 @@
+import { concrete, materials } from '../../actions/index.ts';
+import { boxData } from '../concrete-box/boxData.ts';
+import { tendonStress, type TendonStress } from '../concrete-box/tendonForce.ts';
+import { slabDeckData } from '../slab/slabDeckData.ts';
+import { combinations, worstMoment } from './combine.ts';
+import type { ChainEffects, FrameModel } from './frameModel.ts';
+import type { FrameTraffic } from './frameTraffic.ts';
+import { portalData } from './portalData.ts';
+
+/** Draped tendons of the deck, from the outer face of one wall to that of the other, side by side. */
+export interface FrameTendons {
+  readonly count: number;
+  readonly strands: number;
+  readonly mostStrands: number;
+  readonly ductM: number;
+  readonly areaM2: number;
+  /** Axis below the top at the nodes; 0 in the walls. */
+  readonly levelM: Float64Array;
+  readonly stress: TendonStress;
+  /** Force after all losses and before the lasting ones, and what service asks for, kN. */
+  readonly forceKN: number;
+  readonly initialKN: number;
+  readonly needKN: number;
+  /** Restraint of the lasting force by the walls, on stiff and on soft feet. */
+  readonly parasitic: readonly ChainEffects[];
+  /** Greatest compression in the characteristic combination and tension on the day of stressing, MPa, with their limits. */
+  readonly compression: { readonly stressMPa: number; readonly limitMPa: number };
+  readonly freshTension: { readonly stressMPa: number; readonly limitMPa: number };
+}
+
+/**
+ * Fewest strands with which the deck stays compressed (EN, frequent) or within its tension (AASHTO, Service III).
+ * @param atLeast strands that something else asks for
+ */
+export function frameTendons(model: FrameModel, traffic: FrameTraffic, atLeast = 0): FrameTendons {
+  const { shape, standardId, task } = model;
+  const { sections } = shape;
+  const strandM2 = boxData.strandAreaMm2[standardId] * 1e-6;
+  const soffitM = task.deck.widthM - 2 * shape.wingM;
+  const { sizes } = boxData.tendons;
+  const usual = Math.max(2, Math.floor(soffitM / slabDeckData.tendons.usualM));
+  const mostCount = Math.max(2, Math.floor(soffitM / slabDeckData.tendons.closestM));
+  const largest = sizes[sizes.length - 1]!;
+  const mostStrands = mostCount * largest.strands;
+  const levelM = tendonLevels(model);
+  const arm = (node: number): number => levelM[node]! - sections[node]!.outerM;
+  const unit = model.cases.map(({ run }) => run(restrained(model, arm)));
+  const frequent = combinations(model, traffic, 'frequent', null);
+  const spread = boxData.prestressSpread[standardId];
+  const tensionKPa = boxData.serviceTensionMPa[standardId] * 1e3;
+  const sizeFor = (strands: number) => sizes.find((size) => size.strands * usual >= strands) ?? largest;
+  const around = (ductM: number): number =>
+    standardId === 'lm1' ? ductM / 2 + boxData.decompressedAroundDuctM.value : Infinity;
+
+  const needFor = (ductM: number): number => {
+    let most = 0;
+    for (const node of designed(model))
+      frequent.forEach((combination, k) => {
+        const { areaM2, inertiaM4, outerM, depthM } = sections[node]!;
+        const e = arm(node);
+        for (const sign of [1, -1] as const) {
+          const far =
+            sign > 0 ? Math.min(depthM - outerM, e + around(ductM)) : Math.min(outerM, around(ductM) - e);
+          const { momentKNm, thrustKN } = worstMoment(combination, node, sign);
+          const tension = (momentKNm * far) / inertiaM4 - thrustKN / areaM2 - tensionKPa;
+          if (!(tension > 0)) continue;
+          const pressed =
+            (1 + unit[k]!.thrustKN[node]!) / areaM2 +
+            (sign * (e - unit[k]!.momentKNm[node]!) * far) / inertiaM4;
+          most = Math.max(most, pressed > 0 ? tension / (spread * pressed) : Infinity);
+        }
+      });
+    return most;
+  };
+
+  let strands = Math.max(atLeast, Math.round(mostStrands / 3));
+  for (let pass = 1; ; pass++) {
+    const { ductM } = sizeFor(strands);
+    const jackMPa = boxData.jacking[standardId] * materials.strand[standardId].ultimateMPa;
+    const axialMPa =
+      (strands * strandM2 * jackMPa) / sections[(shape.knees[0] + shape.knees[1]) >> 1]!.areaM2;
+    // From hogging to sagging within half the span the tendon turns twice as much as one that only sags.
+    const sagM = 2 * (shape.midspanM - portalData.tendons.lowFromSoffitM - portalData.tendons.kneeTopM);
+    const stress = tendonStress(
+      { standardId, task, lengthM: shape.spanM, concrete: model.concrete },
+      Math.max(0.05, sagM),
+      Math.min(axialMPa, model.concrete.fckMPa / 2),
+    );
+    const perStrandKN = stress.lastingMPa * strandM2 * 1e3;
+    const needKN = needFor(ductM);
+    const wanted = Math.ceil(needKN / perStrandKN - 1e-6);
+    const next = Math.min(mostStrands, Math.max(2 * sizes[0]!.strands, atLeast, wanted));
+    if (pass < 3 && Math.abs(next - strands) > 0.01 * next) {
+      strands = next;
+      continue;
+    }
+    const forceKN = next * perStrandKN;
+    const initialKN = next * strandM2 * stress.initialMPa * 1e3;
+    const size = sizeFor(next);
+    return {
+      count: size.strands * usual >= next ? usual : Math.min(mostCount, Math.ceil(next / size.strands)),
+      strands: next,
+      mostStrands,
+      ductM: size.ductM,
+      areaM2: next * strandM2,
+      levelM,
+      stress,
+      forceKN,
+      initialKN,
+      needKN,
+      parasitic: unit.map((one) => scaled(one, forceKN)),
+      ...stressesOf(model, traffic, unit, arm, forceKN, initialKN),
+    };
+  }
+}
+
+/** Nodes at which the deck is checked: from face to face of the walls. */
+const designed = ({ shape: { knees } }: FrameModel): number[] =>
+  Array.from({ length: knees[1] - knees[0] - 1 }, (_, i) => knees[0] + 1 + i);
+
+/** Axis of the tendons below the top: high at the walls, low at midspan, two parabolas that meet at the inflection. */
+function tendonLevels({ shape }: FrameModel): Float64Array {
+  const { nodes, knees, spanM, midspanM } = shape;
+  const { kneeTopM, lowFromSoffitM, inflection } = portalData.tendons;
+  const drop = Math.max(0.01, midspanM - lowFromSoffitM - kneeTopM);
+  const levels = new Float64Array(nodes.length);
+  for (let i = knees[0]; i <= knees[1]; i++) {
+    const u = Math.min(1, (2 * Math.min(nodes[i]![0], spanM - nodes[i]![0])) / spanM);
+    levels[i] =
+      kneeTopM + drop * (u < inflection ? u ** 2 / inflection : 1 - (1 - u) ** 2 / (1 - inflection));
+  }
+  return levels;
+}
+
+/** What a tendon force of 1 kN would do to the deck if nothing held it. */
+function restrained(
+  { shape, concrete: { ecmMPa } }: FrameModel,
+  arm: (node: number) => number,
+): { readonly strain: Float64Array; readonly curvature1PerM: Float64Array } {
+  const { nodes, knees, sections } = shape;
+  const strain = new Float64Array(nodes.length - 1);
+  const curvature1PerM = new Float64Array(nodes.length - 1);
+  for (let e = knees[0]; e < knees[1]; e++) {
+    const a = sections[e]!;
+    const b = sections[e + 1]!;
+    strain[e] = -2 / (a.areaM2 + b.areaM2) / (ecmMPa * 1e3);
+    curvature1PerM[e] = -(arm(e) + arm(e + 1)) / (a.inertiaM4 + b.inertiaM4) / (ecmMPa * 1e3);
+  }
+  return { strain, curvature1PerM };
+}
+
+function scaled(effects: ChainEffects, factor: number): ChainEffects {
+  const foot = ({ verticalKN, alongKN, momentKNm }: ChainEffects['feet'][0]): ChainEffects['feet'][0] => ({
+    verticalKN: factor * verticalKN,
+    alongKN: factor * alongKN,
+    momentKNm: factor * momentKNm,
+  });
+  const times = (values: Float64Array): Float64Array => values.map((value) => factor * value);
+  return {
+    momentKNm: times(effects.momentKNm),
+    thrustKN: times(effects.thrustKN),
+    shearKN: times(effects.shearKN),
+    feet: [foot(effects.feet[0]), foot(effects.feet[1])],
+    middleM: factor * effects.middleM,
+  };
+}
+
+function stressesOf(
+  model: FrameModel,
+  traffic: FrameTraffic,
+  unit: readonly ChainEffects[],
+  arm: (node: number) => number,
+  forceKN: number,
+  initialKN: number,
+): Pick<FrameTendons, 'compression' | 'freshTension'> {
+  const { fckMPa } = model.concrete;
+  const { total, transfer, strengthAtTransfer } = boxData.compression;
+  const young = concrete(model.standardId, strengthAtTransfer * fckMPa).fctmMPa;
+  const all = combinations(model, traffic, 'characteristic', null);
+  let compression = { stressMPa: 0, limitMPa: total * fckMPa };
+  let freshTension = { stressMPa: 0, limitMPa: young };
+  const note = (stressMPa: number, limitMPa: number): void => {
+    if (stressMPa / limitMPa > compression.stressMPa / compression.limitMPa)
+      compression = { stressMPa, limitMPa };
+  };
+  for (const node of designed(model)) {
+    const { areaM2, inertiaM4, outerM, depthM } = model.shape.sections[node]!;
+    model.cases.forEach((one, k) => {
+      const axial = (1 + unit[k]!.thrustKN[node]!) / areaM2;
+      const bent = unit[k]!.momentKNm[node]! - arm(node);
+      for (const sign of [1, -1] as const) {
+        // The face opposite to the one that the combination pulls.
+        const far = sign > 0 ? outerM : depthM - outerM;
+        const { momentKNm, thrustKN } = worstMoment(all[k]!, node, sign);
+        const kPa =
+          thrustKN / areaM2 + forceKN * axial + ((momentKNm + sign * forceKN * bent) * far) / inertiaM4;
+        note(kPa / 1e3, total * fckMPa);
+        const g = one.own.momentKNm[node]! + initialKN * bent;
+        const fresh =
+          (initialKN * axial + one.own.thrustKN[node]! / areaM2 + (sign * g * far) / inertiaM4) / 1e3;
+        note(fresh, transfer * strengthAtTransfer * fckMPa);
+        if (-fresh > freshTension.stressMPa) freshTension = { stressMPa: -fresh, limitMPa: young };
+      }
+    });
+  }
+  return { compression, freshTension };
+}

@@ -1,0 +1,86 @@
+import type { IntegralWall, Site, Support } from '../model/index.ts';
+import { constructionDepth } from '../site/index.ts';
+import type { Combo } from './combos.ts';
+import { substructureData } from './data.ts';
+import type { FoundationTask } from './foot.ts';
+import { foundationFor } from './foundationFor.ts';
+import { groundUnder } from './groundUnder.ts';
+import { scourDepth, settingAt } from './setting.ts';
+import type { SupportAsk } from './supportAsk.ts';
+import { line, waterAccessLines } from './supportLines.ts';
+import { wingFootingLines, wingsOf, wingWallsLine } from './wings.ts';
+
+/**
+ * An end of a deck whose wall is in one with it: no bearings, no joint. The wall itself stands in the lines of the design;
+ * here are its wings and, on every ground, the foundation under it, sized for vertical load, thrust and moment as the
+ * frame puts them down, the pressure of the fill in them, with the fill on the heel and wind across.
+ */
+export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWall): Support {
+  const { abutment, piles, factors } = substructureData;
+  const setting = settingAt(site, ask.chainageM);
+  const slabM = ask.roadLevelM - constructionDepth(site.deck, 0);
+  const footM = slabM - wall.heightM;
+  const widthM = site.deck.widthM;
+  const wings = wingsOf(site, Math.max(0, ask.roadLevelM - footM));
+  const wingBarsKg = wings.wallsM3 * abutment.barsKgM3;
+  const acrossKN = ask.acrossKN * factors.windWithTraffic;
+  const task: FoundationTask = {
+    name: ask.name,
+    ...(ask.index === undefined ? {} : { support: ask.index }),
+    shaftLengthM: wall.footM,
+    shaftWidthM: widthM,
+    combos: wall.loads.map(({ verticalKN, alongKN, momentKNm }): Combo => ({
+      verticalKN,
+      alongKN,
+      alongLevelM: footM,
+      momentAlongKNm: momentKNm,
+      acrossKN,
+      acrossLevelM: slabM,
+      capacity: 1,
+      ultimate: 1,
+    })),
+    groundLevelM: Math.min(setting.groundLevelM, footM + piles.capCoverM),
+    waterLevelM: setting.waterLevelM,
+    scourM: scourDepth(setting, 0),
+    backfill: { topLevelM: ask.roadLevelM, widthM, heelShare: abutment.heelShare, inLoads: true },
+    shaftFootM: footM,
+    shaftAreaM2: wall.footM * widthM,
+    shaftBarsKgM3: wall.reinforcementKg / wall.concreteM3,
+    shaftItem: 'abutment-concrete',
+  };
+  const ground = groundUnder(site, ask.chainageM);
+  return {
+    chainageM: ask.chainageM,
+    stretch: ground.stretch,
+    kind: 'abutment',
+    groundLevelM: setting.groundLevelM,
+    topLevelM: ask.soffitLevelM,
+    heightM: Math.max(0, ask.soffitLevelM - setting.groundLevelM),
+    waterDepthM: setting.waterDepthM,
+    permanentKN: ask.permanentKN,
+    trafficKN: ask.trafficKN,
+    shaft: {
+      lengthM: wall.footM,
+      widthM,
+      columns: 1,
+      concreteM3: wall.concreteM3 + wings.wallsM3,
+      reinforcementKg: wall.reinforcementKg + wingBarsKg,
+    },
+    articulation: {
+      fixed: true,
+      bearings: 0,
+      bearingMN: 0,
+      alongKN: ask.alongKN,
+      acrossKN,
+      jointMovementMm: 0,
+      tieDownKN: 0,
+    },
+    lines: [
+      wingWallsLine(ask, wings),
+      line(ask, 'abutments', 'reinforcement', wingBarsKg, `${ask.name} wings`, `${abutment.barsKgM3} kg/m3`),
+      ...wingFootingLines(ask, wings),
+      ...waterAccessLines(ask, setting.waterDepthM),
+    ],
+    foundations: ground.classes.map((odds) => foundationFor(task, odds)),
+  };
+}
