@@ -16,6 +16,7 @@ import { floorPractice } from '../forms/floor/floorFigures.ts';
 import { precastIFigures } from '../forms/precast-i/figures.ts';
 import { halfThroughFigures } from '../forms/half-through/figures.ts';
 import { troughFigures } from '../forms/precast-trough/figures.ts';
+import { portalFigures } from '../forms/portal-frame/figures.ts';
 import { slabBridgeFigures } from '../forms/slab/figures.ts';
 import { steelBoxFigures } from '../forms/steel-box/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
@@ -30,6 +31,7 @@ import { studyFigures } from '../study/figures.ts';
 import { articulationFigures } from '../substructure/articulationFigures.ts';
 import { footLineFigures } from '../substructure/footLineFigures.ts';
 import { foundationFigures } from '../substructure/foundationFigures.ts';
+import { integralFigures } from '../substructure/integralFigures.ts';
 import { shaftFigures } from '../substructure/shaftFigures.ts';
 import { supportFigures } from '../substructure/supportFigures.ts';
 import { wallLineFigures } from '../substructure/wallLineFigures.ts';
@@ -46,6 +48,7 @@ export const manual: readonly Descriptor[] = [
   ...arrangementFigures,
   // A form speaks for its own figures first.
   ...slabBridgeFigures,
+  ...portalFigures,
   ...cantileverFigures,
   ...compositeFigures,
   ...compositeBoxFigures,
@@ -63,6 +66,8 @@ export const manual: readonly Descriptor[] = [
   ...headroomFigures,
   ...placeFigures,
   ...riverFigures,
+  // A wall in one with the deck before abutments.
+  ...integralFigures,
   ...supportFigures,
   ...articulationFigures,
   ...shaftFigures,

@@ -6,6 +6,7 @@ import concreteBox from '../../data/forms/concrete-box.json';
 import fatigue from '../../data/forms/fatigue.json';
 import floor from '../../data/forms/floor.json';
 import plates from '../../data/forms/plates.json';
+import portalFrame from '../../data/forms/portal-frame.json';
 import precastI from '../../data/forms/precast-i.json';
 import precastTrough from '../../data/forms/precast-trough.json';
 import spliced from '../../data/forms/spliced.json';
@@ -44,6 +45,7 @@ const files: Readonly<Record<string, unknown>> = {
   'composite-i': compositeI,
   'composite-box': compositeBox,
   'concrete-box': concreteBox,
+  'portal-frame': portalFrame,
   'precast-i': precastI,
   pretensioned,
   spliced,

@@ -97,7 +97,7 @@ function faceBars(
       for (const [k, loads] of ult[i]!.entries()) {
         needM2[i] = Math.max(needM2[i]!, ultimateBars(model, strip, loads, node, sign, stressed));
         if (!stressed)
-          needM2[i] = Math.max(needM2[i]!, crackBars(model, strip, barM, frq[i]![k]!, chr[i]![k]!));
+          needM2[i] = Math.max(needM2[i], crackBars(model, strip, barM, frq[i]![k]!, chr[i]![k]!));
       }
       const here = needM2[i]! / fits(strip, barM);
       if (here > use) {

@@ -22,7 +22,7 @@ export function footLoads(model: FrameModel, { traffic, tendons }: SizedFrame, e
     const rest = times(one.earth.feet[end], earth.restPressure);
     const least = times(one.earth.feet[end], earth.activePressure);
     const pressed = one.pressedEarth.feet[end];
-    const behind = one.surcharge[end]!.feet[end];
+    const behind = one.surcharge[end].feet[end];
     const warm = (share: number): FootLoad => times(one.longer.feet[end], share * perK * temperature.warmerK);
     const cold = (share: number): FootLoad =>
       times(one.longer.feet[end], -share * perK * temperature.colderK + dry);

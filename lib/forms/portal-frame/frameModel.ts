@@ -59,8 +59,6 @@ export interface FrameModel {
   readonly shape: FrameShape;
   /** Members between nodes: length, m. */
   readonly memberM: Float64Array;
-  /** Member whose thrust and shear go with a node. */
-  readonly memberOf: Int32Array;
   /** Nodes of the deck, axis to axis, and their x, m. */
   readonly deckNodes: readonly number[];
   readonly deckXM: Float64Array;
@@ -97,6 +95,16 @@ export function frameModel(task: UnitTask): FrameModel {
   const widthM = deck.widthM;
   const n = nodes.length;
 
+  const inDeck = Float64Array.from(members, ([i]) => (i >= knees[0] && i < knees[1] ? 1 : 0));
+  const levelM = Float64Array.from(members, ([i, j]) => Math.abs(nodes[j]![0] - nodes[i]![0]));
+  const ownKN = Float64Array.from(members, ([i, j], e) => {
+    if (inDeck[e]) return gamma * area[e]! * levelM[e]!;
+    const knee = i === knees[0] - 1 ? j : j === knees[1] + 1 ? i : -1;
+    // Of the block over a wall its outer half: the inner is the end of the deck.
+    return gamma * (knee < 0 ? area[e]! * memberM[e]! : sections[knee]!.areaM2 * (shape.legTopM / 2));
+  });
+  const superimposedKN = inDeck.map((one, e) => one * deck.superimposedKNm * levelM[e]!);
+
   const caseOf = (feet: FrameOnFeet['feet']): FrameOnFeet => {
     const { lengthOverHeight, leastLengthM, stiffKNm3, softKNm3 } = portalData.foot;
     const frame = planeFrame({
@@ -116,7 +124,7 @@ export function frameModel(task: UnitTask): FrameModel {
       }),
     });
     const middle = (knees[0] + knees[1]) >> 1;
-    const run = (load: FrameLoad): ChainEffects => chain(frameEffects(frame, load), n, memberOf, middle);
+    const run = (load: FrameLoad): ChainEffects => chain(frameEffects(frame, load), beside, middle);
     const down = (forces: Iterable<readonly [node: number, kN: number]>): ChainEffects => {
       const nodal = new Float64Array(3 * n);
       for (const [node, kN] of forces) nodal[3 * node + 1]! -= kN;
@@ -137,11 +145,10 @@ export function frameModel(task: UnitTask): FrameModel {
         wall.forEach((i, k) => {
           nodal[3 * i]! += (end === 0 ? 1 : -1) * forces[k]!;
         });
-        nodal[3 * knees[end]!]! += (end === 0 ? 1 : -1) * endKN;
+        nodal[3 * knees[end]]! += (end === 0 ? 1 : -1) * endKN;
       }
       return run({ nodal });
     };
-    const inDeck = Float64Array.from(members, ([i]) => (i >= knees[0] && i < knees[1] ? 1 : 0));
     const { earth, temperature } = portalData;
     const rangeM =
       (temperature.expansion1PerK * (temperature.warmerK + temperature.colderK) * shape.spanM) / 2;
@@ -155,15 +162,8 @@ export function frameModel(task: UnitTask): FrameModel {
     braked[3 * middle] = 1;
     return {
       feet,
-      own: down(weights(members, memberM, area, gamma)),
-      superimposed: down(
-        weights(
-          members,
-          memberM,
-          inDeck.map((one) => one * deck.superimposedKNm),
-          1,
-        ),
-      ),
+      own: down(halves(ownKN)),
+      superimposed: down(halves(superimposedKN)),
       earth: pushed([0, 1], (depth) => earth.fillKNm3 * depth),
       pressedEarth: pushed([0, 1], (depth, height) =>
         pressureAt(depth, height, { upper: pressure, foot: earth.restPressure }),
@@ -182,7 +182,10 @@ export function frameModel(task: UnitTask): FrameModel {
       run,
     };
   };
-  const memberOf = Int32Array.from({ length: n }, (_, i) => (i < knees[1] ? i : i - 1));
+  // Of a deck node the members on both sides, of a wall node the one over it.
+  const beside = Array.from({ length: n }, (_, i): readonly [number, number] =>
+    i > knees[0] && i < knees[1] ? [i - 1, i] : i < knees[1] ? [i, i] : [i - 1, i - 1],
+  );
   return {
     task,
     standardId,
@@ -191,7 +194,6 @@ export function frameModel(task: UnitTask): FrameModel {
     prestressed,
     shape,
     memberM,
-    memberOf,
     deckNodes,
     deckXM: Float64Array.from(deckNodes, (i) => nodes[i]![0]),
     designNodes: [...wallNodes(shape, 0), ...range(knees[0] + 1, knees[1] - 1), ...wallNodes(shape, 1)],
@@ -219,26 +221,27 @@ function deckVolume({ nodes, sections, knees, legTopM }: FrameShape): number {
   return sum;
 }
 
-function* weights(
-  members: readonly (readonly [number, number])[],
-  memberM: Float64Array,
-  perM: Float64Array,
-  gamma: number,
-): Iterable<readonly [number, number]> {
-  for (const [e, [i, j]] of members.entries()) {
-    const half = (gamma * perM[e]! * memberM[e]!) / 2;
-    yield [i, half];
-    yield [j, half];
+/** Half of what each member weighs on either of its nodes, kN. */
+function* halves(weightKN: Float64Array): Iterable<readonly [node: number, kN: number]> {
+  for (const [e, weight] of weightKN.entries()) {
+    yield [e, weight / 2];
+    yield [e + 1, weight / 2];
   }
 }
 
-function chain(effects: FrameEffects, n: number, memberOf: Int32Array, middle: number): ChainEffects {
+function chain(
+  effects: FrameEffects,
+  beside: readonly (readonly [number, number])[],
+  middle: number,
+): ChainEffects {
   const { startKNm, endKNm, normalKN, shearKN, moved, feet } = effects;
+  const n = beside.length;
   const momentKNm = new Float64Array(n);
   const thrustKN = new Float64Array(n);
   for (let i = 0; i < n; i++) {
     momentKNm[i] = i < n - 1 ? startKNm[i]! : endKNm[i - 1]!;
-    thrustKN[i] = -normalKN[memberOf[i]!]!;
+    const [a, b] = beside[i]!;
+    thrustKN[i] = -(normalKN[a]! + normalKN[b]!) / 2;
   }
   const [first, last] = feet;
   return {

@@ -46,8 +46,8 @@ export function frameFigures(model: FrameModel, sized: SizedFrame): Record<strin
   const [stiff, soft] = cases;
   const middle = (shape.knees[0] + shape.knees[1]) >> 1;
   const knee = shape.knees[0] + 1;
-  const sum = (values: object): number =>
-    Object.values(values).reduce((total: number, value: number) => total + value, 0);
+  const sum = (values: Readonly<Record<string, number>>): number =>
+    Object.values(values).reduce((total, value) => total + value, 0);
   const wallKg = sum(sized.wallBarsKg[0]) + sum(sized.wallBarsKg[1]);
   const feet = [0, 1].flatMap((end) => footLoads(model, sized, end as 0 | 1));
   const deckM2 = shape.spanM * task.deck.widthM;

@@ -61,8 +61,8 @@ export function sizeFrame(model: FrameModel): SizedFrame {
     return {
       upright: barMassKg(volume(`${name}-outer`) + volume(`${name}-inner`)),
       level:
-        barMassKg(portalData.wallAcross.ratio * model.wallM3[end]! + shear.walls.linksM3 / 2) +
-        detailsKgM3 * model.wallM3[end]!,
+        barMassKg(portalData.wallAcross.ratio * model.wallM3[end] + shear.walls.linksM3 / 2) +
+        detailsKgM3 * model.wallM3[end],
     };
   };
   return {

@@ -1,0 +1,117 @@
+import type { Descriptor } from '../../model/index.ts';
+import { formManual } from '../common/formManual.ts';
+
+const { check } = formManual('portal-frame');
+
+const actions = [
+  'spans',
+  './task/depthM',
+  'kneeDepthM',
+  'wallTopM',
+  'firstHeightM',
+  'lastHeightM',
+  './task/deck/superimposedKNm',
+] as const;
+const design =
+  'worst of stiff and soft feet: own weight, superimposed load, fill (least, at rest or K*), temperature, shrinkage, surcharge, traffic of the heaviest metre x width, braking, each where it adds';
+
+const bending = (id: string, ...own: readonly string[]): Descriptor[] => [
+  ...check(
+    `bending-${id}`,
+    [design, ...actions, ...own, 'pressedEarth', 'vehicleWidthM'],
+    [
+      'strands and the most bars that fit at their design strength x lever, with the thrust that comes with the moment',
+      './task/depthM',
+      'data/slab-deck/bars/closestM',
+      'data/portal-frame/bars/layers',
+    ],
+    'EN 1992-1-1 6.1 (from memory)',
+  ),
+  ...check(
+    `bars-${id}`,
+    [
+      'bars over the whole width for the ultimate moment and, where nothing is prestressed, stress and cracks in service',
+      ...actions,
+      ...own,
+      'data/slab-deck/crack/widthMm',
+    ],
+    [
+      'bars of the size found in as many layers, at their closest',
+      'data/slab-deck/bars/closestM',
+      'data/portal-frame/bars/layers',
+    ],
+    'EN 1992-1-1 7.3.4, AASHTO LRFD 5.6.7 (from memory)',
+  ),
+];
+
+/** Limit states of a portal frame. */
+export const portalChecks: readonly Descriptor[] = [
+  ...bending('midspan', 'midspanOwnKNm', 'midspanOwnSoftKNm'),
+  ...bending('knee', 'kneeOwnKNm', 'kneeOwnSoftKNm'),
+  ...bending('wall', 'kneeOwnKNm', 'kneeOwnSoftKNm'),
+  ...bending('wall-inner', 'thrustOwnKN'),
+  ...['shear', 'shear-walls'].flatMap((id) =>
+    check(
+      id,
+      [id === 'shear' ? `${design}; an effective depth off the walls` : design, ...actions],
+      [
+        'the more of the concrete alone and the most links',
+        './task/depthM',
+        'wallFootM',
+        'data/slab-deck/shear/crd',
+        'data/slab-deck/shear/linkRatioMost',
+      ],
+      'EN 1992-1-1 6.2, AASHTO LRFD 5.7.3 (from memory)',
+    ),
+  ),
+  ...check(
+    'bars-across',
+    [
+      'wheels on a plate between the zero moments (AASHTO: share of the steel along), at least a quarter of the bars along',
+      'spans',
+      './task/depthM',
+      'barsLowM2PerM',
+    ],
+    ['bars at their closest', 'data/slab-deck/bars/closestM'],
+  ),
+  ...check(
+    'deflection',
+    [
+      'all lanes on the frame, on stiff or soft feet, its stiffness halved where it cracks',
+      ...actions,
+      'data/portal-frame/cracked/share',
+    ],
+    ['span over the ratio of the standard', 'spans', 'data/:standard/deflection/limitRatio'],
+  ),
+  ...check(
+    'service-tension',
+    [
+      'force with which the deck stays compressed round its tendons (EN) or within its tension (AASHTO), restraint by the walls counted',
+      ...actions,
+      'thrustLostShare',
+      'data/concrete-box/serviceTensionMPa/:standard',
+    ],
+    ['lasting force of the tendons', 'tendonForceKN'],
+    'EN 1992-2 7.3.1, AASHTO LRFD 5.9.2 (from memory)',
+  ),
+  ...check(
+    'tendon-room',
+    ['strands', 'strandCount'],
+    [
+      'largest tendons side by side at their closest',
+      './task/deck/widthM',
+      'wingM',
+      'data/slab-deck/tendons/closestM',
+    ],
+  ),
+  ...check(
+    'compression',
+    ['P / A + (P e + M) / W where it is greatest', ...actions, 'tendonForceKN'],
+    ['share of the strength', 'data/concrete-box/compression/total'],
+  ),
+  ...check(
+    'stressing',
+    ['own weight against the fresh force', ...actions, 'tendonForceKN'],
+    ['tensile strength on that day', 'data/concrete-box/compression/strengthAtTransfer'],
+  ),
+];

@@ -1,0 +1,81 @@
+import { described, type At, type Descriptor } from '../../model/index.ts';
+import { linesOf, spansOf } from '../common/formManual.ts';
+
+const ends = ['first', 'last'] as const;
+const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
+const wallPath = (what: string): string => `options/:option/designs/:unit/walls/:wall/${what}`;
+const wallWord = (at: At): string => (at.index('wall') === 0 ? 'first wall' : 'last wall');
+
+/** What a wall in one with the deck hands to its foundation and to the bill. */
+export const wallFigures: readonly Descriptor[] = [
+  described({
+    path: wallPath('footM'),
+    label: (at) => `thickness at the foot, ${wallWord(at)}`,
+    unit: 'm',
+    method: 'as sized',
+    formula: 'thickness of the walls at their foot',
+    inputs: (at) => ({ foot: `${at.unit}/figures/wallFootM` }),
+    compute: ({ foot }) => foot,
+  }),
+  described({
+    path: wallPath('heightM'),
+    label: (at) => `top of the slab to top of the foundation, ${wallWord(at)}`,
+    unit: 'm',
+    method: 'as sized',
+    formula: 'height of the frame at this end',
+    inputs: (at) => ({ height: `${at.unit}/figures/${ends[at.index('wall')]!}HeightM` }),
+    compute: ({ height }) => height,
+  }),
+  described({
+    path: wallPath('movementMm'),
+    label: (at) => `movement of the deck at the ${wallWord(at)}`,
+    unit: 'mm',
+    method: 'as sized',
+    formula: 'movement of each end',
+    inputs: (at) => ({ movement: `${at.unit}/figures/movementMm` }),
+    compute: ({ movement }) => movement,
+  }),
+  ...(['concreteM3', 'reinforcementKg'] as const).map((what) =>
+    described({
+      path: wallPath(what),
+      label: (at) => `${what === 'concreteM3' ? 'concrete' : 'bars'} of the ${wallWord(at)}`,
+      unit: what === 'concreteM3' ? 'm3' : 'kg',
+      method: 'sum of the bill',
+      formula: 'its measured lines',
+      inputs: (at) => ({
+        lines: linesOf(
+          at,
+          ...(what === 'concreteM3' ? [wallWord(at)] : [`${wallWord(at)} upright`, `${wallWord(at)} level`]),
+        ),
+      }),
+      compute: ({ lines }) => sum(lines),
+    }),
+  ),
+  ...(
+    [
+      ['verticalKN', 'vertical load', 'kN'],
+      ['alongKN', 'thrust, towards the span', 'kN'],
+      ['momentKNm', 'moment, towards the span', 'kNm'],
+    ] as const
+  ).map(([field, label, unit]) =>
+    described({
+      path: wallPath(`loads/:load/${field}`),
+      label: (at) => `${label} on the foundation, ${wallWord(at)}, combination ${at.index('load') + 1}`,
+      unit,
+      method: 'frame on stiff and on soft feet',
+      formula:
+        'own weight + superimposed load + fill (at rest, least, or K*) + temperature and shrinkage + surcharge + traffic, characteristic, as they go together',
+      inputs: (at) => ({
+        spans: spansOf(at),
+        deck: `${at.unit}/task/depthM`,
+        height: `${at.unit}/figures/${ends[at.index('wall')]!}HeightM`,
+        superimposed: `${at.unit}/task/deck/superimposedKNm`,
+        pressed: [`${at.unit}/figures/pressedEarth`, `${at.unit}/figures/pressedEarthSoft`],
+        rest: 'data/portal-frame/earth/restPressure',
+        active: 'data/portal-frame/earth/activePressure',
+        warmer: 'data/portal-frame/temperature/warmerK',
+        colder: 'data/portal-frame/temperature/colderK',
+      }),
+    }),
+  ),
+];

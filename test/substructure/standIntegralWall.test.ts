@@ -1,0 +1,86 @@
+import { expect, it } from 'vitest';
+import { portalFrame } from '../../lib/forms/portal-frame/index.ts';
+import type { Design, MeasuredLine, Support } from '../../lib/model/index.ts';
+import { constructionDepth } from '../../lib/site/index.ts';
+import { standSupports } from '../../lib/substructure/index.ts';
+import { measure } from '../../lib/takeoff/index.ts';
+import { crossing, profile, unitOn } from './crossing.ts';
+
+const sum = (lines: readonly MeasuredLine[], item: string): number =>
+  lines.reduce((total, line) => (line.item === item ? total + line.quantity : total), 0);
+
+const site = { ...crossing, endM: 24, lengthM: 24, waters: [] };
+const frame = (): Design =>
+  portalFrame.size({
+    form: 'portal-frame',
+    method: 'falsework',
+    spansM: [24],
+    deck: site.deck,
+    standard: 'lm1',
+    planRadiusM: Infinity,
+    depthM: 0.8,
+    clearUnderM: [8.75, 8.75],
+  });
+const stood = (design: Design): Support[] =>
+  standSupports(site, [{ ...unitOn([0, 24]), form: 'portal-frame' }], [design], profile);
+
+it('standSupports(frame) has two walls in one with the deck: no bearings, joints or seats', () => {
+  const supports = stood(frame());
+  expect(supports.map(({ kind }) => kind)).toEqual(['abutment', 'abutment']);
+  for (const { lines, articulation } of supports) {
+    expect(sum(lines, 'bearing') + sum(lines, 'expansion-joint')).toBe(0);
+    expect(articulation).toMatchObject({ bearings: 0, bearingMN: 0, jointMovementMm: 0, fixed: true });
+    expect(lines.some(({ what }) => /bank seat|full height/u.test(what))).toBe(false);
+  }
+});
+
+it('measure(frame) counts each wall once: in the design down to its foot, in the foundation below it', () => {
+  const design = frame();
+  const supports = stood(design);
+  const lines = measure(site, [design], supports, profile);
+  const wings = supports.flatMap((one) => one.lines).filter(({ what }) => what.endsWith('wing walls'));
+  expect(sum(lines, 'abutment-concrete')).toBeCloseTo(
+    design.walls!.reduce((total, wall) => total + wall.concreteM3, 0) + sum(wings, 'abutment-concrete'),
+    9,
+  );
+  const slab = 10 - constructionDepth(site.deck, 0);
+  for (const { foundations } of supports)
+    for (const { lines: below, footing } of foundations) {
+      const gap = Math.max(0, slab - design.walls![0]!.heightM - footing.topLevelM);
+      expect(sum(below, 'abutment-concrete')).toBeCloseTo(gap * design.walls![0]!.footM * 12, 9);
+    }
+});
+
+it('standSupports(frame) sizes footings and piles for thrust and moment on every ground', () => {
+  const design = frame();
+  const plain = stood(design)[0]!;
+  expect(plain.foundations.map(({ kind }) => kind)).toEqual(['spread', 'bored-piles']);
+  const more = (
+    change: (load: { verticalKN: number; alongKN: number; momentKNm: number }) => object,
+  ): Support =>
+    stood({
+      ...design,
+      walls: design.walls!.map((wall) => ({
+        ...wall,
+        loads: wall.loads.map((load) => ({ ...load, ...change(load) })),
+      })),
+    })[0]!;
+  const area = ({ foundations }: Support): number =>
+    foundations[0]!.footing.lengthM * foundations[0]!.footing.widthM;
+  const piles = ({ foundations }: Support): number => sum(foundations[1]!.lines, 'bored-pile');
+  const thrust = more(({ alongKN }) => ({ alongKN: 2 * alongKN }));
+  const turned = more(({ momentKNm, verticalKN }) => ({ momentKNm: momentKNm - 1.5 * verticalKN }));
+  expect(area(thrust)).toBeGreaterThan(area(plain));
+  expect(piles(thrust)).toBeGreaterThan(piles(plain));
+  expect(area(turned)).toBeGreaterThan(area(plain));
+});
+
+it('standSupports(frame) slides nowhere: thrust within 0.4 of the vertical load with the fill on the heel', () => {
+  const [support] = stood(frame());
+  const { footing } = support!.foundations[0]!;
+  const heel = 0.65 * (footing.lengthM - support!.shaft.lengthM);
+  const fill = heel * 12 * (10 - footing.topLevelM) * 19;
+  const own = footing.lengthM * footing.widthM * footing.depthM * 25;
+  for (const { verticalKN, alongKN } of frame().walls![0]!.loads)
+    expect(Math.abs(alongKN)).toBeLessThan(0.4 * (verticalKN + fill + own));
+});
