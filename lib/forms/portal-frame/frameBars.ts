@@ -1,7 +1,8 @@
+import { materials } from '../../actions/index.ts';
 import { barDesignMPa } from '../common/bars.ts';
 import { slabData } from '../common/slab/slabData.ts';
 import { bendingCapacity, compressionDepth, strandDesignMPa } from '../concrete-box/bendingCapacity.ts';
-import { serviceBars } from '../slab/crackedSection.ts';
+import { crackWidthMm, serviceBars } from '../slab/crackedSection.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
 import { combinations, worstMoment, type Combination, type Combined } from './combine.ts';
 import { wallNodes, type FrameModel } from './frameModel.ts';
@@ -94,11 +95,9 @@ function faceBars(
     let use = 0;
     nodes.forEach((node, i) => {
       const strip = stripOf(model, node, sign, barM, inDeck);
-      for (const [k, loads] of ult[i]!.entries()) {
+      for (const loads of ult[i]!)
         needM2[i] = Math.max(needM2[i]!, ultimateBars(model, strip, loads, node, sign, stressed));
-        if (!stressed)
-          needM2[i] = Math.max(needM2[i], crackBars(model, strip, barM, frq[i]![k]!, chr[i]![k]!));
-      }
+      if (!stressed) needM2[i] = crackBars(model, strip, barM, frq[i]!, chr[i]!, needM2[i]!);
       const here = needM2[i]! / fits(strip, barM);
       if (here > use) {
         use = here;
@@ -186,26 +185,33 @@ function ultimateBars(
   return areaM2;
 }
 
-/** Bars for stress and cracks; a thrust takes its part of the moment off the bars. */
+/** Bars for stress and cracks, at least those given; a thrust takes its part of the moment off the bars. */
 function crackBars(
   model: FrameModel,
   strip: Strip,
   barM: number,
-  frequent: Combined,
-  characteristic: Combined,
+  frequent: readonly Combined[],
+  characteristic: readonly Combined[],
+  leastM2: number,
 ): number {
   const { widthM, depthM, centroidM, effectiveM } = strip;
-  const perM = ({ momentKNm, thrustKN }: Combined): number =>
-    (momentKNm - thrustKN * (centroidM - (1 - slabData.leverRatio.value) * effectiveM)) / widthM;
-  return (
-    widthM *
-    serviceBars(
-      { depthM, effectiveM, barM },
-      { frequentKNm: perM(frequent), characteristicKNm: perM(characteristic) },
-      model.standardId,
-      model.concrete,
-    )
-  );
+  const { standardId, concrete } = model;
+  const arm = centroidM - (1 - slabData.leverRatio.value) * effectiveM;
+  const worst = (loads: readonly Combined[]): number =>
+    Math.max(...loads.map(({ momentKNm, thrustKN }) => (momentKNm - thrustKN * arm) / widthM));
+  const piece = { depthM, effectiveM, barM };
+  const moments = { frequentKNm: worst(frequent), characteristicKNm: worst(characteristic) };
+  if (!(Math.max(moments.frequentKNm, moments.characteristicKNm) > 0)) return leastM2;
+  const { yieldMPa } = materials.reinforcement[standardId];
+  const { crack, serviceStressShare } = slabDeckData;
+  const share = standardId === 'lm1' ? crack.sigma : serviceStressShare.value;
+  const held =
+    leastM2 * slabData.leverRatio.value * effectiveM * share * yieldMPa * 1e3 >=
+      moments.characteristicKNm * widthM &&
+    (standardId !== 'lm1' ||
+      !(moments.frequentKNm > 0) ||
+      crackWidthMm(piece, leastM2 / widthM, moments.frequentKNm, standardId, concrete) <= crack.widthMm);
+  return held ? leastM2 : Math.max(leastM2, widthM * serviceBars(piece, moments, standardId, concrete));
 }
 
 function capacity(
