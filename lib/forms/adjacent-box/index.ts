@@ -9,7 +9,7 @@ import { boxBeams } from './boxBeams.ts';
  */
 export const adjacentBox: FormModule = {
   id: 'adjacent-box',
-  family: 'girder',
+  family: 'box',
   name: 'Adjacent box beams',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
