@@ -10,7 +10,18 @@ import { perM2, splitQuantities } from '../takeoff/index.ts';
 import { numberFlag, readFlags, refuse, type Flags } from './flags.ts';
 import { rounded } from './rounded.ts';
 
-const flagNames = ['form', 'spans', 'width', 'lanes', 'depth', 'carriageway', 'radius', 'loading', 'girders'];
+const flagNames = [
+  'form',
+  'spans',
+  'width',
+  'lanes',
+  'depth',
+  'haunch',
+  'carriageway',
+  'radius',
+  'loading',
+  'girders',
+];
 const SURFACING_M = 0.09;
 /** Barriers take what the carriageway leaves of the width, half on each side. */
 const BARRIERS_M = 1;
@@ -54,7 +65,14 @@ function pylonsOf(spans: readonly number[]): number[] {
   return [main, main + 1].filter((support) => support > 0 && support < spans.length);
 }
 
-function readTask(argv: readonly string[]): { task: Omit<UnitTask, 'depthM'>; depthM: number | undefined } {
+interface Asked {
+  readonly task: Omit<UnitTask, 'depthM'>;
+  readonly depthM: number | undefined;
+  /** Depth over piers / depth at midspan; 1 for constant depth. */
+  readonly haunch: number;
+}
+
+function readTask(argv: readonly string[]): Asked {
   const problems: Problem[] = [];
   const flags = readFlags(flagNames, argv);
   const form: FormId | undefined = oneOf('form', flags.values['form'], sizeableForms, problems);
@@ -64,6 +82,8 @@ function readTask(argv: readonly string[]): { task: Omit<UnitTask, 'depthM'>; de
   const widthM = metres('width', 60);
   const lanes = numberFlag(flags, 'lanes', { above: 0, most: 16, whole: true, unit: 'lanes' }, problems);
   const depthM = metres('depth', 40);
+  const haunch =
+    numberFlag(flags, 'haunch', { above: 1, most: 4, unit: 'times the midspan depth' }, problems) ?? 1;
   const carriagewayM = metres('carriageway', 60) ?? (widthM === undefined ? undefined : widthM - BARRIERS_M);
   const planRadiusM = metres('radius', 1e6) ?? Infinity;
   const girders = numberFlag(
@@ -125,6 +145,7 @@ function readTask(argv: readonly string[]): { task: Omit<UnitTask, 'depthM'>; de
   const module = formModule(form);
   return {
     depthM,
+    haunch,
     task: {
       form,
       spansM,
@@ -138,19 +159,25 @@ function readTask(argv: readonly string[]): { task: Omit<UnitTask, 'depthM'>; de
   };
 }
 
-const { task, depthM: asked } = readTask(process.argv.slice(2));
+const { task, depthM: asked, haunch } = readTask(process.argv.slice(2));
+/** The task at a midspan depth, deeper over the piers where that was asked for. */
+const taskAt = (midspanM: number): UnitTask => ({
+  ...task,
+  depthM: midspanM,
+  ...(haunch > 1 ? { haunch: { pierDepthM: haunch * midspanM, law: 'parabolic' as const } } : {}),
+});
 const module = formModule(task.form);
 const mean = meanRates(ratesFor({ ratePack: 'demo-2026', rates: [] }));
 const depthM =
   asked ??
   finish(
     leastCostDepth(depthRange(task.form, task.method, task.spansM, task.deck), (trialM) => {
-      const { lines, limitingCheck } = module.size({ ...task, depthM: trialM });
+      const { lines, limitingCheck } = module.size(taskAt(trialM));
       const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
       return { cost, utilisation: limitingCheck.utilisation };
     }),
   );
-const design = module.size({ ...task, depthM });
+const design = module.size(taskAt(depthM));
 const { superstructure, supports } = splitQuantities(design.lines);
 const deckAreaM2 = task.spansM.reduce((sum, span) => sum + span, 0) * task.deck.widthM;
 process.stdout.write(

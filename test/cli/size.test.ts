@@ -42,6 +42,24 @@ describe('size', () => {
     expect(sized.depthM.midspan / 80).toBeLessThanOrEqual(0.05);
   }, 30_000);
 
+  it('size(composite-i --haunch) is deeper over its piers than at midspan', () => {
+    const sized = size(
+      '--form',
+      'composite-i',
+      '--spans',
+      '60,80,60',
+      '--width',
+      '12',
+      '--lanes',
+      '3',
+      '--depth',
+      '2.6',
+      '--haunch',
+      '1.5',
+    );
+    expect(sized.depthM).toEqual({ support: 3.9, midspan: 2.6 });
+  }, 30_000);
+
   it('size(bad input) is refused with subject, expected, received, place and remedy, exit code 2', () => {
     const printed = command(
       'size',

@@ -12,7 +12,7 @@ import type { DeckSpec, StandardId } from '../../model/index.ts';
 import { compositeData } from './compositeData.ts';
 import type { GirderModel } from './girderModel.ts';
 
-const stride = 4;
+const stride = 2;
 
 /** Share of a lorry in an outer marked lane that the girder on that side carries. */
 export function fatigueShare(deck: DeckSpec, offsetsM: readonly number[]): number {
@@ -39,7 +39,7 @@ export function fatigueLimitMPa(standard: StandardId): number {
 
 /**
  * Moment range on one girder, kNm at the stations, of one fatigue lorry brought to the whole traffic: damage equivalent
- * factor by span under the European standard, factor for endless life in the other. Every fourth station is run, the
+ * factor by span under the European standard, factor for endless life in the other. Every second station is run, the
  * rest lie straight between.
  */
 export function fatigueRange(model: GirderModel, beam: LineBeam): Float64Array {

@@ -22,6 +22,8 @@ export interface EdgeCase {
   readonly supportsM: readonly number[];
   readonly lengthM: number;
   readonly elementM: Float64Array;
+  /** Elements that tell all: the first half where the spans are symmetrical. */
+  readonly telling: number;
   /** Web of a girder to the edge of the deck, m. */
   readonly reachM: number;
   /** Between the webs of the two girders, m. */
@@ -52,6 +54,8 @@ export function edgeCase(task: UnitTask): EdgeCase {
   const heavier = weigh(loads[0]!) >= weigh(loads[1]!) ? 0 : 1;
   const curve = curvatureFactor(task, planesM);
   const load = loads[heavier]!;
+  const symmetrical = spansM.every((spanM, i) => spanM === spansM[spansM.length - 1 - i]);
+  const elements = spansM.length * elementsPerSpan;
   const grade = usualSteel(task.standard);
   const thickestM = thickestPlateM(task.standard);
   return {
@@ -59,8 +63,9 @@ export function edgeCase(task: UnitTask): EdgeCase {
     standard,
     supportsM: supportPositions(spansM),
     lengthM: totalLength(spansM),
+    telling: symmetrical ? elements / 2 : elements,
     elementM: Float64Array.from(
-      { length: spansM.length * elementsPerSpan },
+      { length: elements },
       (_, e) => spansM[Math.floor(e / elementsPerSpan)]! / elementsPerSpan,
     ),
     reachM,

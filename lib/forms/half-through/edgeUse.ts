@@ -42,7 +42,7 @@ export function edgeUse(c: EdgeCase, statics: EdgeStatics, girder: EdgeGirder): 
   let topForceKN = 0;
   let criticalKN = Infinity;
   let holdingKN = 0;
-  for (let e = 0; e < c.elementM.length; e++) {
+  for (let e = 0; e < c.telling; e++) {
     const plates = edgePlates(girder, e);
     const bed = girder.beds[Math.floor(e / elementsPerSpan)]!;
     for (const i of [e, e + 1]) {

@@ -219,10 +219,9 @@ function steps(c: EdgeCase, needM: Float64Array, widthM: number): Float64Array {
   );
 }
 
-/** On symmetrical spans both halves get the greater need. */
+/** Needs of the first half carried over to the other where it tells all; the greater where both are there. */
 function mirrored(c: EdgeCase, needM: Float64Array): Float64Array {
-  const { spansM } = c.task;
-  if (!spansM.every((spanM, i) => spanM === spansM[spansM.length - 1 - i])) return needM;
+  if (c.telling === needM.length) return needM;
   return needM.map((t, e) => Math.max(t, needM[needM.length - 1 - e]!));
 }
 
@@ -292,7 +291,7 @@ function flangeNeeds(
   );
   const top = new Float64Array(c.elementM.length);
   const bottom = new Float64Array(c.elementM.length);
-  for (let e = 0; e < top.length; e++) {
+  for (let e = 0; e < c.telling; e++) {
     const bed = beds[Math.floor(e / elementsPerSpan)]!;
     const sag = Math.max(demand.sagKNm[e]!, demand.sagKNm[e + 1]!);
     const hog = Math.min(demand.hogKNm[e]!, demand.hogKNm[e + 1]!);
@@ -306,19 +305,28 @@ function flangeNeeds(
       webM: plates.webM[e]!,
     };
     const web = (at.heightM * at.webM) / (6 * plates.widthM);
-    const moved = (t: number, want: number): number =>
-      Math.min(most, Math.max(least, t + (want / aim - 1) * (t + web), t / 3));
     for (let round = 0; round < 6; round++) {
       flangeUse(use, at, bed, rules, sag, hog, range);
       const before = at.topM + at.bottomM;
-      at.topM = moved(at.topM, Math.max(use.sagTop, use.hogTop, use.fatigueTop));
-      at.bottomM = moved(at.bottomM, Math.max(use.sagBottom, use.hogBottom, use.fatigueBottom));
+      at.topM = moved(at.topM, web, least, most, Math.max(use.sagTop, use.hogTop, use.fatigueTop));
+      at.bottomM = moved(
+        at.bottomM,
+        web,
+        least,
+        most,
+        Math.max(use.sagBottom, use.hogBottom, use.fatigueBottom),
+      );
       if (Math.abs(at.topM + at.bottomM - before) < 2e-4) break;
     }
     top[e] = at.topM;
     bottom[e] = at.bottomM;
   }
   return { top, bottom };
+}
+
+/** Thickness moved by the share it lacks or has to spare: a modulus is made of the flange and a sixth of the web. */
+function moved(t: number, web: number, least: number, most: number, want: number): number {
+  return Math.min(most, Math.max(least, t + (want / aim - 1) * (t + web), t / 3));
 }
 
 function massesOf(

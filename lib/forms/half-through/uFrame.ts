@@ -52,8 +52,11 @@ export function criticalForceKN(
   spacingM: number,
   spanM: number,
 ): number {
-  const euler = (lengthM: number): number => (Math.PI ** 2 * flangeKNm2) / lengthM ** 2;
-  return Math.min(euler(spacingM), Math.max(euler(spanM), share * 2 * Math.sqrt(bedKNm2 * flangeKNm2)));
+  const euler = Math.PI ** 2 * flangeKNm2;
+  return Math.min(
+    euler / spacingM ** 2,
+    Math.max(euler / spanM ** 2, share * 2 * Math.sqrt(bedKNm2 * flangeKNm2)),
+  );
 }
 
 /** Lateral force on a frame from the bow of the flange it holds, kN; infinite where the flange buckles. */
