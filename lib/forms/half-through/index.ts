@@ -51,7 +51,10 @@ function size(task: UnitTask): Design {
     ownWeightShare: ownWeightShare(unit),
     lines: halfThroughLines(unit),
     heaviestPiece: heaviestPiece(unit),
-    warnings: overLimit(checks, 'plates'),
+    warnings: [
+      ...overLimit(checks, 'plates'),
+      'The girders stand on both sides of the road: it cannot be widened later.',
+    ],
     figures: figuresOf(unit),
   };
 }
