@@ -15,7 +15,7 @@ export interface UnitTask {
   readonly depthM: number;
   /** Number of girders, where the form lets it be chosen. */
   readonly girders?: number;
-  /** Composite I-girders on continuous spans: deeper over the inner supports; constant depth when absent. */
+  /** Composite I-girders on continuous spans: deeper over the inner supports; constant depth when absent. Steel boxes: their depth over the piers, sought when absent. */
   readonly haunch?: Haunch;
   /** Composite I-girders: beams between the girders, carried by the cross-frames, so that the slab spans half the spacing. */
   readonly substringers?: boolean;

@@ -1,11 +1,9 @@
 import { trafficEnvelope, trafficOnInfluence, type TrafficEnvelope } from '../../actions/index.ts';
 import {
   deflectionInfluence,
-  launchStages,
   lineBeam,
   loadTrack,
   momentInfluence,
-  pointLoads,
   stepped,
   uniform,
   type Effects,
@@ -14,12 +12,13 @@ import {
 } from '../../mechanics/index.ts';
 import { curveTorque } from '../composite-box/tubTorsion.ts';
 import { fatigueRange } from '../floor/fatigue.ts';
+import { cantileveredSpans, erection, type ErectionMoments } from './erection.ts';
 import { boxSection, noSection, type BoxPlates } from './boxSection.ts';
 import { steelBoxData } from './steelBoxData.ts';
 import { elementsPerSpan, type SteelBoxModel } from './steelBoxModel.ts';
 
 /** Forces on the whole box with one set of plates. */
-export interface BoxEffects {
+export interface BoxEffects extends ErectionMoments {
   readonly beam: LineBeam;
   /** Weight of the steel as it stays after erection, superimposed load, traffic; characteristic. */
   readonly own: Effects;
@@ -30,11 +29,6 @@ export interface BoxEffects {
   /** Design moments of the finished bridge at the stations, kNm: greatest sagging (0 or more) and hogging (0 or less). */
   readonly sagKNm: Float64Array;
   readonly hogKNm: Float64Array;
-  /** Design moments while it is built. */
-  readonly stageSagKNm: Float64Array;
-  readonly stageHogKNm: Float64Array;
-  /** Greatest reaction of a launching bearing, kN, design; 0 unless launched. */
-  readonly launchKN: number;
   /** Design shear of the whole box and design torque, by element. */
   readonly shearKN: Float64Array;
   readonly torqueKNm: Float64Array;
@@ -87,17 +81,6 @@ function trackOf(beam: LineBeam): Track {
   const made = loadTrack(beam.xM);
   tracks.set(beam.xM, made);
   return made;
-}
-
-/**
- * Spans whose middle is closed by cantilevers from both sides: the longest inner ones where the box is built that way.
- * Shorter ones are put together on towers before and hold the arms down.
- */
-export function cantileveredSpans({ task }: Pick<SteelBoxModel, 'task'>): number[] {
-  const { method, spansM } = task;
-  if (method !== 'balanced-cantilever') return [];
-  const least = steelBoxData.cantilever.leastOverLongest * Math.max(...spansM);
-  return spansM.flatMap((span, i) => (i > 0 && i < spansM.length - 1 && span >= least - 1e-9 ? [i] : []));
 }
 
 /**
@@ -177,76 +160,6 @@ function deflections({ task, standard, traffic }: SteelBoxModel, beam: LineBeam)
     const most = Math.max(...loads.map((load) => trafficOnInfluence(load, track, line).max));
     return (most * standard.deflection.limitRatio) / spanM;
   });
-}
-
-/** Design moments while the box is built. */
-function erection(
-  model: SteelBoxModel,
-  staged: LineBeam,
-  own: Effects,
-  ownKNm: Float64Array,
-  hingesM: readonly number[],
-): Pick<BoxEffects, 'stageSagKNm' | 'stageHogKNm' | 'launchKN'> {
-  const n = model.xM.length;
-  const stageSagKNm = new Float64Array(n);
-  const stageHogKNm = new Float64Array(n);
-  const { uls } = model.standard.factors;
-  if (model.task.method === 'launch') {
-    const shares = launchShares(model.task.spansM);
-    const longest = Math.max(...model.task.spansM);
-    const weight = uls.permanent * Math.max(...ownKNm);
-    stageSagKNm.fill(shares.sag * weight * longest ** 2);
-    stageHogKNm.fill(shares.hog * weight * longest ** 2);
-    return { stageSagKNm, stageHogKNm, launchKN: shares.reaction * weight * longest };
-  }
-  const { craneKN, imbalance } = steelBoxData.cantilever;
-  // A derrick on the tip of each of the two arms that meet.
-  const cranes =
-    hingesM.length > 0
-      ? pointLoads(
-          staged,
-          hingesM.map((xM) => ({ xM, loadKN: 2 * craneKN })),
-        )
-      : null;
-  for (let i = 0; i < n; i++) {
-    const moment =
-      uls.permanent * ((1 + imbalance) * own.momentKNm[i]! + (cranes === null ? 0 : cranes.momentKNm[i]!));
-    stageSagKNm[i] = Math.max(0, moment);
-    stageHogKNm[i] = Math.min(0, moment);
-  }
-  return { stageSagKNm, stageHogKNm, launchKN: 0 };
-}
-
-interface LaunchShares {
-  readonly sag: number;
-  readonly hog: number;
-  readonly reaction: number;
-}
-
-const launches = new Map<string, LaunchShares>();
-
-/** Moments over w L2 and reaction over w L of the longest span while it is crossed; they depend on proportions alone. */
-function launchShares(spansM: readonly number[]): LaunchShares {
-  const longest = Math.max(...spansM);
-  const at = spansM.indexOf(longest);
-  const some = spansM.slice(Math.max(0, at - 2), at + 2).map((span) => span / longest);
-  const key = some.map((span) => span.toFixed(4)).join();
-  const known = launches.get(key);
-  if (known) return known;
-  const { noseOverSpan, noseOverDeckWeight, noseStiffness, yardOverSpan } = steelBoxData.launch;
-  const { sagKNm, hogKNm, reactionKN } = launchStages({
-    spansM: some,
-    weightKNm: 1,
-    noseM: noseOverSpan,
-    noseKNm: noseOverDeckWeight,
-    noseStiffness,
-    yardSpansM: [yardOverSpan, yardOverSpan],
-    steps: 5,
-  });
-  const made = { sag: sagKNm, hog: hogKNm, reaction: reactionKN };
-  if (launches.size >= 64) launches.clear();
-  launches.set(key, made);
-  return made;
 }
 
 /** Greatest design shear over the ends of every element and the signs of traffic, kN. */

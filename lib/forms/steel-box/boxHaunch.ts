@@ -1,3 +1,4 @@
+import type { Haunch } from '../../model/index.ts';
 import { supportPositions } from '../common/supports.ts';
 import { steelBoxData } from './steelBoxData.ts';
 
@@ -17,18 +18,19 @@ function reaches(spansM: readonly number[]): [left: number, right: number][] {
 
 /**
  * Depth along a unit, m at the places given: `midspanM` where no haunch reaches, `pierM` over the piers of the longest
- * haunches, less over those of shorter ones, a parabola between.
+ * haunches, less over those of shorter ones, a parabola or a straight line between.
  */
 export function depthsAlong(
   spansM: readonly number[],
   atM: ArrayLike<number>,
   midspanM: number,
   pierM: number,
+  law: Haunch['law'] = 'parabolic',
 ): Float64Array {
   const supportsM = supportPositions(spansM);
   const reach = reaches(spansM);
   const longest = Math.max(...reach.flat());
-  const { power } = steelBoxData.haunch;
+  const power = law === 'straight' ? 1 : steelBoxData.haunch.power;
   const deeper = reach.map((both) => (longest > 0 ? ((pierM - midspanM) * Math.max(...both)) / longest : 0));
   return Float64Array.from({ length: atM.length }, (_, i) => {
     const x = atM[i]!;

@@ -15,11 +15,12 @@ export interface SteelBoxDeck {
 /** Utilisation up to which a check holds. */
 const holding = 1.0001;
 
-/** Depths over the piers that are tried where there may be a haunch, deeper than in the spans. */
+/** Depths over the piers that are tried where there may be a haunch, deeper than in the spans: the one asked for, or published ones. */
 function haunches(task: UnitTask): number[] {
   const { pierOverSpan, leastDeeper } = steelBoxData.haunch;
   // A soffit that is pushed over its piers is straight.
   if (task.spansM.length === 1 || task.method === 'launch') return [];
+  if (task.haunch) return [task.haunch.pierDepthM];
   const governing = Math.max(...task.spansM);
   return pierOverSpan
     .map((ratio) => ratio * governing)
@@ -34,17 +35,20 @@ interface Trial {
 
 /**
  * The box with the least steel among those that hold; where none holds the one that comes nearest. Tried are the depth of
- * the spans throughout, with leaning webs and where those do not do with upright ones, and the published depths at the
- * piers.
+ * the spans throughout, with leaning webs and, where those do not do and there is no haunch, with upright ones, and the
+ * published depths at the piers or the one asked for.
  */
 export function choosePierDepth(task: UnitTask): SteelBoxDeck {
   const deeper = haunches(task);
   const governing = Math.max(...task.spansM);
   let best: Trial | null = null;
   // A shallow box of one depth is out of the question where there may be a haunch.
-  if (deeper.length === 0 || task.depthM >= steelBoxData.haunch.constantOverSpan * governing) {
+  if (
+    deeper.length === 0 ||
+    (!task.haunch && task.depthM >= steelBoxData.haunch.constantOverSpan * governing)
+  ) {
     best = trialOf(task, task.depthM, false, null);
-    if (best.use > holding) best = least(best, trialOf(task, task.depthM, true, null));
+    if (deeper.length === 0 && best.use > holding) best = least(best, trialOf(task, task.depthM, true, null));
   }
   for (const depthM of deeper) {
     const trial = trialOf(task, depthM, true, best);

@@ -28,11 +28,18 @@ export const steelBox: FormModule = {
   size,
 };
 
-/** @throws RangeError for spans, depth or widths that are not possible, or a deck plate that is not above 0 */
+/**
+ * @throws RangeError for spans, depth or widths that are not possible, a deck plate that is not above 0, or a haunch
+ * shallower than its spans
+ */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
   if (task.deckPlateM !== undefined && !(task.deckPlateM > 0))
     throw new RangeError(`deckPlateM: expected more than 0 m, received ${task.deckPlateM}`);
+  if (task.haunch && !(task.haunch.pierDepthM >= task.depthM))
+    throw new RangeError(
+      `haunch.pierDepthM: expected at least the depth at midspan ${task.depthM} m, received ${task.haunch.pierDepthM}`,
+    );
   const { box, checks } = choosePierDepth(task);
   const { model } = box;
   const reactions = steelBoxReactions(box);

@@ -23,7 +23,8 @@ const aim = 0.97;
 
 /**
  * Plates, weight and forces found in turn until they agree. Placing traffic takes most of the time: its forces are found
- * for the first plates and for those after them, as they hardly change once weight and stiffness lie about right.
+ * for the first plates, and for those after them where the first were a guess, as they hardly change once weight and
+ * stiffness lie about right.
  */
 export function sizeSteelBox(model: SteelBoxModel, before: SizedSteelBox | null): SizedSteelBox {
   let plates = before?.plates ?? guess(model);
@@ -44,7 +45,8 @@ export function sizeSteelBox(model: SteelBoxModel, before: SizedSteelBox | null)
       pressed,
     };
     steel = boxSteel(model, plates, effects);
-    effects = boxEffects(model, plates, steel.ownKNm, round === 0 ? null : effects);
+    const guessed = before === null && round === 0;
+    effects = boxEffects(model, plates, steel.ownKNm, guessed ? null : effects);
   }
   return { model, plates, effects, steel };
 }

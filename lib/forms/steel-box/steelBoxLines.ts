@@ -1,7 +1,7 @@
 import { materials } from '../../actions/index.ts';
 import type { MeasuredLine } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
-import { cantileveredSpans } from './boxEffects.ts';
+import { cantileveredSpans } from './erection.ts';
 import { bottomWidth } from './boxLayout.ts';
 import { steelBoxData } from './steelBoxData.ts';
 import type { SizedSteelBox } from './sizeSteelBox.ts';

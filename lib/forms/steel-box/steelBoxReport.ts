@@ -1,7 +1,7 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { bredt } from '../../mechanics/index.ts';
 import { bearingPair } from './bearingsApart.ts';
-import { cantileveredSpans } from './boxEffects.ts';
+import { cantileveredSpans } from './erection.ts';
 import { bottomWidth } from './boxLayout.ts';
 import { boxSection, noSection } from './boxSection.ts';
 import { bottomPressedShare } from './boxUse.ts';

@@ -114,6 +114,11 @@ describe('depthsAlong()', () => {
     expect(Array.from(depths)).toEqual([3, 3, 5, 3.5, 3, 3.5, 5, 3]);
   });
 
+  it('is straight where that is asked for', () => {
+    const depths = depthsAlong([80, 100, 80], [80, 105, 130], 3, 5, 'straight');
+    expect(Array.from(depths)).toEqual([5, 4, 3]);
+  });
+
   it('is level where the pier is no deeper, and on a single span', () => {
     expect(Array.from(depthsAlong([60, 60], [0, 30, 60], 3, 3))).toEqual([3, 3, 3]);
     expect(Array.from(depthsAlong([60], [0, 30, 60], 3, 3))).toEqual([3, 3, 3]);

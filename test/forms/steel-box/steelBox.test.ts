@@ -85,6 +85,14 @@ describe('steelBox.size()', () => {
     expect(pushed.depthM.support).toBe(2.8);
   });
 
+  it('takes the depth over the piers that is asked for, never one above the soffit of its spans', () => {
+    const asked = steelBox.size({ ...usual, haunch: { pierDepthM: 4.4, law: 'parabolic' } });
+    expect(asked.depthM).toEqual({ support: 4.4, midspan: 3.6 });
+    expect(() => steelBox.size({ ...usual, haunch: { pierDepthM: 3, law: 'parabolic' } })).toThrow(
+      /haunch\.pierDepthM: expected at least/u,
+    );
+  });
+
   it('says that a thin deck plate is too thin, and is lighter for it', () => {
     const thin = steelBox.size({ ...usual, deckPlateM: 0.01 });
     expect(useOf(thin, 'deck-plate')).toBeCloseTo(1.4, 6);
