@@ -1,7 +1,8 @@
 import { faultsOf } from '../arrange/index.ts';
-import type { AppraisedOption, Option, Site, Study, Unit } from '../model/index.ts';
+import type { AppraisedOption, Option, Study, Unit } from '../model/index.ts';
 import { appraiseOptionAt } from './appraiseOption.ts';
 import { drawn } from './drawn.ts';
+import { between, BEYOND_ABUTMENT } from './keptUnits.ts';
 import type { Memory } from './memory.ts';
 import { requestFor } from './requestFor.ts';
 import { workbench } from './workbench.ts';
@@ -13,19 +14,6 @@ export interface KeptAppraisal {
   readonly option: AppraisedOption | null;
   /** Why it may not stand as it is; empty where nothing forbids it. */
   readonly faults: readonly string[];
-}
-
-/** The same supports, with the abutments where the brief has them now; null where a support would lie beyond one. */
-function between({ startM, endM }: Site, units: readonly Unit[]): Unit[] | null {
-  const last = units.length - 1;
-  const moved = units.map((unit, u) => ({
-    ...unit,
-    supportsM: unit.supportsM.map((x, i) =>
-      u === 0 && i === 0 ? startM : u === last && i === unit.supportsM.length - 1 ? endM : x,
-    ),
-  }));
-  const rises = moved.every(({ supportsM }) => supportsM.every((x, i) => i === 0 || x > supportsM[i - 1]!));
-  return rises ? moved : null;
 }
 
 /** Depth of each unit, m: the main unit as typed, the others and an untyped one as they were. */
@@ -52,7 +40,7 @@ export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory
   const own = study.options.kept.find(({ number }) => number === before.number);
   const { number, form, method } = own ?? before;
   const units = between(site, (own ?? before).units);
-  if (units === null) return { option: null, faults: ['a support would stand beyond an abutment'] };
+  if (units === null) return { option: null, faults: [BEYOND_ABUTMENT] };
   const depthsM = depthsOf(units, before, own?.depthM ?? null);
   const depthM = depthsM[units.indexOf(mainUnit(units))]!;
   const option: Option = { number, form, method, units, depthM, origin: 'kept' };

@@ -1,3 +1,4 @@
+import { faultsOf } from '../arrange/index.ts';
 import type { AppraisedOption, Check, Option, Status, WorkedOption } from '../model/index.ts';
 import { optionError, priceOption, type PricedOption } from '../price/index.ts';
 import { rulingsFor, statusOf } from '../rules/index.ts';
@@ -6,6 +7,7 @@ import { perM2, splitQuantities } from '../takeoff/index.ts';
 import type { Drawn } from './drawn.ts';
 import { optionFacts } from './facts.ts';
 import { remembered } from '../kept.ts';
+import { requestFor } from './requestFor.ts';
 import { riversCrossed } from './riversCrossed.ts';
 import type { Work } from './work.ts';
 import { mainUnit, spareOf, workOption, workOptionAt, type Worked } from './workOption.ts';
@@ -67,6 +69,7 @@ function judged(
       ...worked,
       status,
       rulings,
+      faults: faultsOf(worked.units, requestFor(worked, site), site),
       quantities: superstructure,
       perM2: perM2(superstructure, deckAreaM2),
       supportQuantities: supports,

@@ -11,6 +11,7 @@ export const optionsOf = (study: Study, found: readonly FormProposals[]): Regist
   numberOptions(
     found.flatMap(({ arrangements }) => arrangements),
     study.options,
+    survey(study.brief),
   );
 
 /**
@@ -20,7 +21,7 @@ export const optionsOf = (study: Study, found: readonly FormProposals[]): Regist
 export function conclude(
   study: Study,
   found: readonly FormProposals[],
-  { register, retired }: Registered,
+  { register, retired, unworkable }: Registered,
   priced: readonly PricedAppraisal[],
 ): Appraisal {
   const contenders = priced.map(({ option: { number, status, cost }, totals }) => ({
@@ -36,9 +37,12 @@ export function conclude(
       .map(({ option }) => option)
       .sort((a, b) => a.cost.p50 - b.cost.p50 || a.number - b.number),
     currency: study.books.currency,
-    dropped: found.flatMap(({ form, arrangements, because }) =>
-      arrangements.length === 0 ? [{ form, because }] : [],
-    ),
+    dropped: [
+      ...found.flatMap(({ form, arrangements, because }) =>
+        arrangements.length === 0 ? [{ form, because }] : [],
+      ),
+      ...unworkable,
+    ],
     droppedCounts: found.flatMap(({ counts }) => counts),
     register,
     retired,

@@ -8,6 +8,9 @@ import { mainUnit, spansOf } from './workOption.ts';
 
 type Known = Record<string, Facts[string]>;
 
+/** Places closer than this are the same, m. */
+const SAME_M = 1e-5;
+
 /** What is known of a form before anything is arranged: the span it must reach, the deck, the line of the road. */
 export function formFacts(site: Site): Facts {
   return {
@@ -63,7 +66,10 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
   const spans = spansOf(main);
   const all = [...new Set(option.units.flatMap((unit) => unit.supportsM))];
   const barred = (x: number): boolean =>
-    site.zones.some((zone) => zone.hard && x > zone.fromM && x < zone.toM);
+    site.zones.some(
+      ({ hard, fromM, toM }) =>
+        hard && x > fromM - PIER_HALF_WIDTH_M + SAME_M && x < toM + PIER_HALF_WIDTH_M - SAME_M,
+    );
   const inner = all.slice(1, -1);
   return {
     ...formFacts(site),
@@ -72,7 +78,7 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
     method: option.method,
     unitLengthM: main.supportsM.at(-1)! - main.supportsM[0]!,
     supportsInRiver: inner.filter((x) => waterDepthAt(site, x) > 0).length,
-    supportsBarred: all.filter(barred).length,
+    supportsBarred: inner.filter(barred).length,
     // A study has one radius for the whole crossing.
     radiusConstant: site.planRadiusM === null ? 'unknown' : true,
     ...(option.method === 'falsework' ? falseworkOver(site, main) : {}),

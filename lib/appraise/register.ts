@@ -1,4 +1,5 @@
-import type { Arrangement, Option, OptionsSlice, RegisterEntry } from '../model/index.ts';
+import type { Arrangement, Dropped, Option, OptionsSlice, RegisterEntry, Site } from '../model/index.ts';
+import { keptUnits } from './keptUnits.ts';
 
 /** Options with their numbers, and the register as the study keeps it from now on. */
 export interface Registered {
@@ -6,6 +7,8 @@ export interface Registered {
   readonly register: readonly RegisterEntry[];
   /** Numbers given before that nothing proposes any more. */
   readonly retired: readonly number[];
+  /** Options kept by hand that cannot be worked out, each with the reasons. */
+  readonly unworkable: readonly Dropped[];
 }
 
 /** Supports of an arrangement, abutments included; neighbouring units share one. */
@@ -16,12 +19,23 @@ function supportsOf(units: Arrangement['units']): number {
 /**
  * Numbers the proposals. A proposal is known by form, method and number of supports and keeps its number for life; a new
  * one takes the next free number in the order in which proposals come. Options kept by hand hold their own numbers.
- * Of two proposals that are known by the same three the first stays.
+ * Of two proposals that are known by the same three the first stays. A kept option that cannot be worked out on the site
+ * holds its number too.
  */
-export function numberOptions(proposals: readonly Arrangement[], slice: OptionsSlice): Registered {
+export function numberOptions(
+  proposals: readonly Arrangement[],
+  slice: OptionsSlice,
+  site: Site,
+): Registered {
   const register = [...slice.register];
-  const kept: Option[] = slice.kept.map((option) => ({ ...option, origin: 'kept' }));
-  const taken = new Set(kept.map((option) => option.number));
+  const kept: Option[] = [];
+  const unworkable: Dropped[] = [];
+  for (const option of slice.kept) {
+    const placed = keptUnits(site, option);
+    if ('units' in placed) kept.push({ ...option, units: placed.units, origin: 'kept' });
+    else unworkable.push({ form: option.form, option: option.number, because: placed.because });
+  }
+  const taken = new Set(slice.kept.map((option) => option.number));
   let next = Math.max(0, ...register.map((entry) => entry.number), ...taken) + 1;
   const proposed: Option[] = [];
   for (const { form, method, units } of proposals) {
@@ -41,5 +55,6 @@ export function numberOptions(proposals: readonly Arrangement[], slice: OptionsS
     options: [...kept, ...proposed].sort((a, b) => a.number - b.number),
     register,
     retired: register.map((entry) => entry.number).filter((number) => !taken.has(number)),
+    unworkable,
   };
 }

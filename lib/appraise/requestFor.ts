@@ -1,7 +1,7 @@
 import type { ArrangeRequest, Windows } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
 import type { FormId, Site } from '../model/index.ts';
-import { endRatioWindow } from '../rules/index.ts';
+import { endRatioWindow, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import type { FormAndMethod } from './trialRows.ts';
 
@@ -12,10 +12,9 @@ const HUNG_SPACING = 0.5;
 
 /** Band of the longest span of a unit on a crossing. */
 function spanBand(form: FormId, site: Site): Pick<Windows, 'minSpanM' | 'maxSpanM'> {
-  const open = openSpans(form, site.lengthM);
-  if (!open)
-    throw new RangeError(`arrangement: ${form} has no span that fits a crossing of ${site.lengthM} m`);
-  return { minSpanM: open[0], maxSpanM: open[1] };
+  // Where the shortest is longer than the crossing nothing is found, and what stands there is told so.
+  const [least, most] = openSpans(form, site.lengthM) ?? spanWindow(form).possible;
+  return { minSpanM: least, maxSpanM: most };
 }
 
 function continuousWindows(form: FormId, site: Site): Windows {
@@ -30,8 +29,7 @@ function continuousWindows(form: FormId, site: Site): Windows {
 
 /**
  * What the search is asked for one form and method: its pattern and the windows that the rules leave open.
- * @throws RangeError where no span fits the crossing, or where the rules of a continuous form say nothing of end spans: a
- *   fault of the book
+ * @throws RangeError where the rules of a continuous form say nothing of end spans: a fault of the book
  */
 export function requestFor({ form, method }: FormAndMethod, site: Site): ArrangeRequest {
   const { pattern } = formModule(form);

@@ -132,6 +132,8 @@ export interface WorkedOption {
 export interface AppraisedOption extends WorkedOption {
   readonly status: Status;
   readonly rulings: readonly Ruling[];
+  /** What is wrong with where its supports stand, each by name: only an arrangement set by hand has any. */
+  readonly faults: readonly string[];
   /** Superstructure. */
   readonly quantities: Quantities;
   /** Superstructure, per m2 of deck. */

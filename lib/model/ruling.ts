@@ -28,5 +28,7 @@ export interface Flip {
 /** A form or arrangement that was not worked out. */
 export interface Dropped {
   readonly form: FormId;
+  /** Number of an option kept by hand that cannot be worked out; absent where a whole form is dropped. */
+  readonly option?: number;
   readonly because: readonly string[];
 }

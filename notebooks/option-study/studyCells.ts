@@ -79,7 +79,7 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     if (v.last === null) return nobody;
     const before = referenceIn(v.last.appraisal, v.options.reference);
     if (before === undefined) return nobody;
-    if (v.last.asked === v.asked) return { option: before, faults: [], isFrozen: false };
+    if (v.last.asked === v.asked) return { option: before, faults: before.faults, isFrozen: false };
     return { ...appraiseKept(v.asked, before, kept), isFrozen: true };
   });
   const reference = graph.cell('reference', { asItStands }, (v) => v.asItStands.option);

@@ -820,6 +820,7 @@ function option(row: Row): AppraisedOption {
     lines: [],
     months: { p10: row.months[0], p50: row.months[1], p90: row.months[2] },
     status: row.status,
+    faults: [],
     rulings: [],
     quantities: perM2,
     perM2,

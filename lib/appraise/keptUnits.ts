@@ -1,0 +1,42 @@
+import { formModule } from '../forms/index.ts';
+import type { KeptOption, Site, Unit } from '../model/index.ts';
+
+export const BEYOND_ABUTMENT = 'a support would stand beyond an abutment';
+
+/** The same supports, with the abutments where the brief has them now; null where a support would lie beyond one. */
+export function between({ startM, endM }: Site, units: readonly Unit[]): Unit[] | null {
+  const last = units.length - 1;
+  const moved = units.map((unit, u) => ({
+    ...unit,
+    supportsM: unit.supportsM.map((x, i) =>
+      u === 0 && i === 0 ? startM : u === last && i === unit.supportsM.length - 1 ? endM : x,
+    ),
+  }));
+  const rises = moved.every(({ supportsM }) => supportsM.every((x, i) => i === 0 || x > supportsM[i - 1]!));
+  return rises ? moved : null;
+}
+
+/** Why a unit cannot be sized as it is laid out, or null. */
+function unsizeable({ form, supportsM, pylons = [] }: Unit): string | null {
+  const { name, pattern, mostSpanM = Infinity } = formModule(form);
+  const longest = Math.max(...supportsM.slice(1).map((x, i) => x - supportsM[i]!));
+  if (longest > mostSpanM) {
+    return `${name}: ${Number(longest.toFixed(1))} m cannot be sized; ${Number(mostSpanM.toFixed(1))} m is the longest span`;
+  }
+  if (pattern.kind !== 'pylon') return null;
+  const inner = pylons.every((p, i) => p > (pylons[i - 1] ?? 0) && p < supportsM.length - 1);
+  return inner && (pylons.length === 1 || pylons.length === 2)
+    ? null
+    : `${name}: one or two pylons on inner supports expected`;
+}
+
+/** Units of an option kept by hand on the crossing as it is now, or why it cannot be worked out at all. */
+export function keptUnits(
+  site: Site,
+  { units }: Pick<KeptOption, 'units'>,
+): { readonly units: readonly Unit[] } | { readonly because: readonly string[] } {
+  const placed = between(site, units);
+  if (placed === null) return { because: [BEYOND_ABUTMENT] };
+  const because = placed.map(unsizeable).filter((fault) => fault !== null);
+  return because.length > 0 ? { because } : { units: placed };
+}

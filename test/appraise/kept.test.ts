@@ -1,0 +1,63 @@
+import { describe, expect, it } from 'vitest';
+import { appraise, memory, type Appraisal, type FormId, type Unit } from '../../lib/index.ts';
+import { lowFerry } from './studies.ts';
+
+const kept = memory();
+
+/** The worked example with one option kept by hand and composite I-girders proposed beside it. */
+function withKept(supportsM: readonly number[], form: FormId = 'composite-i', pylons?: number[]): Appraisal {
+  const study = lowFerry();
+  const unit: Unit = { form, role: 'main', supportsM, ...(pylons ? { pylons } : {}) };
+  const method = form === 'cable-stayed' ? 'stay-cantilever' : 'crane';
+  const option = { number: 1, form, method, units: [unit], depthM: null } as const;
+  return appraise(
+    {
+      ...study,
+      books: { ...study.books, draws: 500 },
+      options: { ...study.options, forms: ['composite-i'], kept: [option] },
+    },
+    kept,
+  );
+}
+const first = ({ options }: Appraisal): Appraisal['options'][number] =>
+  options.find(({ number }) => number === 1)!;
+
+describe('appraise(option kept by hand)', { timeout: 60_000 }, () => {
+  it('works out a pier in the river, puts it out and names the stretch', () => {
+    const option = first(withKept([1240, 1300, 1350, 1410, 1470]));
+    expect(option.status).toBe('out');
+    expect(option.faults).toContain('support in a barred stretch: River Wend');
+    expect(option.rulings.find(({ rule }) => rule === 'support-barred')!.effect).toBe('out');
+    expect(option.cost.p50).toBeGreaterThan(0);
+  });
+
+  it('counts half a pier and its working space to what must stay clear', () => {
+    // The river begins at 1325; a pier at 1324.5 stands with one leg in it, one at 1323.4 beside it.
+    expect(first(withKept([1240, 1290, 1324.5, 1400, 1470])).status).toBe('out');
+    expect(first(withKept([1240, 1290, 1323.4, 1400, 1470])).faults.join()).not.toMatch(/barred/u);
+  });
+
+  it('works out spans outside their windows and says which', () => {
+    const short = first(withKept([1240, 1262, 1320, 1390, 1470]));
+    expect(short.faults).toEqual(['end span outside its window']);
+    const long = first(withKept([1240, 1470]));
+    expect(long.faults).toEqual(['span outside the band of the form']);
+    expect(long.status).toBe('out');
+  });
+
+  it('stands on the abutments of the brief, wherever they were when it was kept', () => {
+    const option = first(withKept([1230, 1290, 1390, 1480]));
+    expect(option.units[0]!.supportsM).toEqual([1240, 1290, 1390, 1470]);
+  });
+
+  it.each<[string, readonly number[], FormId, number[] | undefined, RegExp]>([
+    ['a pier beyond an abutment', [1200, 1220, 1390, 1470], 'composite-i', undefined, /beyond an abutment/u],
+    ['a pylon on an abutment', [1240, 1320, 1470], 'cable-stayed', [0], /pylons on inner supports/u],
+  ])('says why %s cannot be worked out, and works out the rest', (_, supports, form, pylons, why) => {
+    const appraisal = withKept(supports, form, pylons);
+    const dropped = appraisal.dropped.find(({ option }) => option === 1)!;
+    expect(dropped.because.join()).toMatch(why);
+    expect(appraisal.options.length).toBeGreaterThan(0);
+    expect(appraisal.retired).not.toContain(1);
+  });
+});
