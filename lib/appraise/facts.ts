@@ -2,6 +2,7 @@ import type { AppraisedOption, Facts, Option, Site, Study, Unit, WorkedOption } 
 import { roadLevelAt, constructionDepth, groundAt, waterDepthAt } from '../site/index.ts';
 import { quantitiesOf } from '../takeoff/index.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
+import { curveFacts } from './curveFacts.ts';
 import { riverFacts } from './riverFacts.ts';
 import { supportFacts } from './supportFacts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
@@ -73,6 +74,7 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
   const inner = all.slice(1, -1);
   return {
     ...formFacts(site),
+    ...curveFacts(site, spans),
     mainSpanM: Math.max(...spans),
     continuity: spans.length > 1 ? 'continuous' : 'simple',
     method: option.method,
@@ -109,7 +111,7 @@ export function optionFacts(
   const clearances = obstacles.flatMap(({ clearance }) => (clearance ? [clearance] : []));
   const known: Known = {
     ...arrangementFacts(site, option),
-    ...supportFacts(option),
+    ...supportFacts(site, option),
     ...riverFacts(site, option),
     falseworkHeightM: option.method === 'falsework' ? falseworkHeightM(site, option, main) : 0,
     haunched: design.depthM.support !== design.depthM.midspan,

@@ -37,7 +37,7 @@ export interface Proposals {
 export interface SiteMemory {
   /** By form and books. */
   readonly proposals: Kept<Proposals>;
-  /** By arrangement, method and depths. */
+  /** By arrangement, method, depths and books. */
   readonly atDepth: Kept<AtDepth>;
   /** By the same, books and draws. */
   readonly priced: Kept<PricedOption>;
@@ -60,7 +60,7 @@ export interface Memory {
   readonly rows: Kept<TrialRow>;
   /** Measured lines of trial piers by the place they stand at; there, by load. */
   readonly piers: Kept<(readonly MeasuredLine[])[]>;
-  /** By place and what is asked of them. */
+  /** By place and what is asked of them, abutments also by books. */
   readonly supports: Kept<Support>;
   /** By brief without its budget. */
   readonly sites: Kept<SiteMemory>;

@@ -1,5 +1,6 @@
 import type { At, Descriptor } from '../model/index.ts';
-import { fact } from './factFigure.ts';
+import { centralAngle, chordOffset } from './curveFacts.ts';
+import { asIs, fact, factOf } from './factFigure.ts';
 
 /** Odds of the grounds on which a foundation does not stand, and their overloads. */
 const overloads = (at: At): { readonly odds: string[]; readonly overloads: string[] } => {
@@ -12,6 +13,28 @@ const overloads = (at: At): { readonly odds: string[]; readonly overloads: strin
     odds: failing.map((path) => `${path}/odds`),
     overloads: failing.map((path) => `${path}/overload`),
   };
+};
+
+const ofSupports = (at: At, field: string): string[] =>
+  at.option.supports.map((_, s) => `${at.root}/supports/${s}/${field}`);
+
+/** A fact of the longest span on the curve of the road; not known where the radius is not. */
+const curved = (
+  id: string,
+  formula: string,
+  compute: (spanM: number, radiusM: number) => number,
+): readonly Descriptor[] => {
+  const inputs = (at: At): { readonly span: string; readonly radius: string } => ({
+    span: `${at.root}/facts/mainSpanM`,
+    radius: 'site/planRadiusM',
+  });
+  return [
+    {
+      ...fact(id, formula, inputs, ({ span, radius }) => compute(span, radius)),
+      when: (at) => at.appraisal.site.planRadiusM !== null,
+    },
+    fact(id, `${formula}; waits for the radius`, inputs),
+  ];
 };
 
 /** What the rules are told of the supports. */
@@ -38,4 +61,44 @@ export const supportFactFigures: readonly Descriptor[] = [
     }),
     ({ shafts }) => Math.max(0, ...shafts),
   ),
+  fact('seismicCounted', factOf('seismicCounted').meaning, () => ({
+    given: 'brief/crossing/groundAccelerationG',
+  })),
+  asIs('groundAccelerationG', (at) => ({
+    given:
+      at.appraisal.site.seismic == null
+        ? 'brief/crossing/groundAccelerationG'
+        : 'site/seismic/groundAccelerationG',
+  })),
+  fact('siteClassKnown', factOf('siteClassKnown').meaning, () => ({ given: 'brief/crossing/siteClass' })),
+  ...(['pierHeightNext', 'pierHeightAll'] as const).map((id) =>
+    fact(id, `${factOf(id).meaning} Only once a unit has two.`, (at) => ({
+      heights: ofSupports(at, 'heightM'),
+    })),
+  ),
+  fact(
+    'vesselKN',
+    'greatest of the supports; once none can be struck, 0',
+    (at) => ({
+      forces: at.option.supports.flatMap(({ articulation }, s) =>
+        articulation.vesselKN === undefined ? [] : [`${at.root}/supports/${s}/articulation/vesselKN`],
+      ),
+    }),
+    ({ forces }) => Math.max(0, ...forces),
+  ),
+  fact('vesselsKnown', factOf('vesselsKnown').meaning, (at) => ({
+    vessels: at.study.brief.waters.map((_, i) => `brief/waters/${i}/vesselDwtT`),
+    depths: ofSupports(at, 'waterDepthM'),
+  })),
+  fact(
+    'tieDownKN',
+    'greatest of the supports',
+    (at) => ({ uplifts: ofSupports(at, 'articulation/tieDownKN') }),
+    ({ uplifts }) => Math.max(0, ...uplifts),
+  ),
+  fact('integralAbutments', factOf('integralAbutments').meaning, (at) => ({
+    bearings: ofSupports(at, 'articulation/bearings'),
+  })),
+  ...curved('chordOffsetM', 'longest span^2 / (8 R)', chordOffset),
+  ...curved('centralAngleDeg', 'longest span / R x 180 / pi', centralAngle),
 ];

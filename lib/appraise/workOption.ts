@@ -97,8 +97,10 @@ function standing(
   profile: RoadProfile,
 ) {
   return standSupports(bench.site, units, designs, profile, (site, ask) =>
-    remembered(bench.kept.supports, `${placeText(site, ask.chainageM)} ${JSON.stringify(ask)}`, () =>
-      standOneSupport(site, ask),
+    remembered(
+      bench.kept.supports,
+      `${placeText(site, ask.chainageM)} ${JSON.stringify(ask)} ${ask.kind === 'abutment' ? bench.booksKey : ''}`,
+      () => standOneSupport(site, ask, bench.costOf),
     ),
   );
 }
@@ -126,7 +128,9 @@ const keyOf = ({ form, method, units }: Option, depthsM: readonly number[]): str
 
 /** The same, from memory where it has been worked out before. */
 function atDepths(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
-  return remembered(bench.keptHere.atDepth, keyOf(option, depthsM), () => workAt(bench, option, depthsM));
+  // Abutments are chosen by cost, so the books are part of what it is made from.
+  const key = `${keyOf(option, depthsM)} ${bench.booksKey}`;
+  return remembered(bench.keptHere.atDepth, key, () => workAt(bench, option, depthsM));
 }
 
 /** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */

@@ -14,6 +14,9 @@ export interface Spread {
 
 export type Status = 'in' | 'possible' | 'out';
 
+/** A beam in the fill, a wall from the ground up, or columns through fill that spills out to the front. */
+export type AbutmentWall = 'bank seat' | 'full height' | 'spill-through';
+
 /** One support of an option with what stands under it. */
 export interface Support {
   readonly chainageM: number;
@@ -29,6 +32,8 @@ export interface Support {
   readonly permanentKN: number;
   readonly trafficKN: number;
   readonly shaft: PierShaft;
+  /** Abutments: how the fill is held, and whether the deck is cast into it without bearings and joint. */
+  readonly abutment?: { readonly wall: AbutmentWall; readonly integral: boolean };
   readonly articulation: Articulation;
   /** Measured lines of the support above its foundation: bearings, joint, shaft or abutment walls, tie-downs. */
   readonly lines: readonly MeasuredLine[];
@@ -49,6 +54,10 @@ export interface Articulation {
   readonly jointMovementMm: number;
   /** Design uplift taken by a tie-down, kN; 0 where there is none. */
   readonly tieDownKN: number;
+  /** Kind of the bearings by movement and load; absent where the deck is cast in. */
+  readonly bearingKind?: 'elastomeric' | 'pot';
+  /** Force of a vessel against the support, kN; absent where none can reach it. */
+  readonly vesselKN?: number;
 }
 
 export interface PierShaft {

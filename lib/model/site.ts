@@ -1,4 +1,4 @@
-import type { GroundStretch, ObstacleKind, Road } from './study.ts';
+import type { GroundStretch, ObstacleKind, Road, SiteClass } from './study.ts';
 import type { StandardId } from './ids.ts';
 
 /** The crossing as the later stages read it: plain data, chainages and levels in metres. */
@@ -18,6 +18,8 @@ export interface Site {
   /** Infinity on a straight; null when unknown. */
   readonly planRadiusM: number | null;
   readonly skewDeg: number | null;
+  /** Earthquake to be reckoned with: acceleration on rock, share of gravity; null or absent where it is not known. */
+  readonly seismic?: { readonly groundAccelerationG: number; readonly siteClass: SiteClass | null } | null;
   /** Widest stretch barred to supports, m, and where it lies; null when nothing is barred. */
   readonly mainOpening: { readonly fromM: number; readonly toM: number; readonly widthM: number } | null;
 }

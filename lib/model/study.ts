@@ -45,7 +45,14 @@ export interface Crossing {
   readonly planRadiusM: number | 'straight' | Unknown;
   /** Skew of the supports from square, degrees, 0 = square. */
   readonly skewDeg: number | Unknown;
+  /** Design ground acceleration on rock, share of gravity; 0 where none is to be reckoned with. */
+  readonly groundAccelerationG: number | Unknown;
+  /** Site class of EN 1998-1, A rock to E soft over stiff. */
+  readonly siteClass: SiteClass | Unknown;
 }
+
+export const siteClasses = ['A', 'B', 'C', 'D', 'E'] as const;
+export type SiteClass = (typeof siteClasses)[number];
 
 export interface ProfilePoint {
   readonly chainageM: number;

@@ -85,6 +85,19 @@ export const siteFigures: readonly Descriptor[] = [
     compute: ({ end, start }) => end - start,
   }),
   copied(
+    'site/seismic/groundAccelerationG',
+    () => 'brief/crossing/groundAccelerationG',
+    'design ground acceleration, share of gravity',
+  ),
+  described({
+    path: 'site/seismic/siteClass',
+    label: 'site class',
+    unit: '',
+    method: 'as given',
+    formula: 'read from the brief',
+    inputs: () => ({ given: 'brief/crossing/siteClass' }),
+  }),
+  copied(
     'site/groundX/:i',
     (at) => `brief/crossing/ground/${at.name('i')}/chainageM`,
     'chainage of a ground point',

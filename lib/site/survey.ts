@@ -107,6 +107,13 @@ export function survey(brief: Brief): Site {
     standard: brief.loading,
     planRadiusM: radius === 'unknown' ? null : radius === 'straight' ? Infinity : radius,
     skewDeg: crossing.skewDeg === 'unknown' ? null : crossing.skewDeg,
+    seismic:
+      crossing.groundAccelerationG === 'unknown'
+        ? null
+        : {
+            groundAccelerationG: crossing.groundAccelerationG,
+            siteClass: crossing.siteClass === 'unknown' ? null : crossing.siteClass,
+          },
     mainOpening: widestBarred(zones, crossing.startM, crossing.endM),
   };
 }

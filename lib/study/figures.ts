@@ -86,6 +86,8 @@ export const studyFigures: readonly Descriptor[] = [
   typed('brief/crossing/ground/:i/levelM', (at) => `level of ground point ${at.index('i') + 1}`, 'm'),
   typed('brief/crossing/planRadiusM', 'plan radius', 'm'),
   typed('brief/crossing/skewDeg', 'skew of the supports', 'deg'),
+  typed('brief/crossing/groundAccelerationG', 'design ground acceleration, share of gravity'),
+  typed('brief/crossing/siteClass', 'site class'),
   typed('brief/road/startLevelM', 'proposed road level at the start', 'm'),
   typed('brief/road/endLevelM', 'proposed road level at the end', 'm'),
   typed('brief/road/fixedEnd', 'end of the road that cannot move', '', typedOrPreset),

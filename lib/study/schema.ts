@@ -4,6 +4,7 @@ import {
   groundClassIds,
   methodIds,
   obstacleKinds,
+  siteClasses,
   standardIds,
   stripKinds,
   type FormId,
@@ -40,6 +41,8 @@ const crossing = z.strictObject({
     .max(20_000),
   planRadiusM: z.union([unknown, z.literal('straight'), z.number().min(10).max(1e6)]).default('unknown'),
   skewDeg: orUnknown(z.number().min(-75).max(75)).default('unknown'),
+  groundAccelerationG: orUnknown(z.number().min(0).max(2)).default('unknown'),
+  siteClass: orUnknown(z.enum(siteClasses)).default('unknown'),
 });
 
 const road = z.strictObject({

@@ -10,6 +10,8 @@ export interface Hold {
   readonly alongKN: number;
   readonly acrossKN: number;
   readonly movementMm: number;
+  /** Permanent load of the whole unit where it is held here, kN; 0 where it slides. */
+  readonly heldKN: number;
 }
 
 /**
@@ -37,6 +39,7 @@ export function articulate(
     alongKN: i === held ? fixedAlong : substructureData.friction.coefficient * (permanent[i] ?? 0),
     acrossKN: windOnDeck(depthOver(design, i), tributary(x, i)),
     movementMm: jointMovement(material, Math.abs(chainage - x[held]!)),
+    heldKN: i === held ? permanent.reduce((sum, one) => sum + one, 0) : 0,
   }));
 }
 

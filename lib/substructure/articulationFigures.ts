@@ -36,6 +36,33 @@ function friction(left: readonly number[], right: readonly number[], perLine: nu
   return (mu * (1 + a) * more) / 2 - (mu * (1 - a) * less) / 2;
 }
 
+/** What movement grows from: the fixed point and the material of every unit that rests here. */
+const movementFigures = (at: At) => {
+  const units = unitsAt(at);
+  return {
+    here: `${at.foot}/chainageM`,
+    fixed: units.map(({ unit }) => `${at.root}/units/${unit}/supportsM/${fixedIn(at, unit)}`),
+    figures: units.flatMap(({ unit }) =>
+      ['expansionPerK', 'rangeK', 'shorteningPerM'].map(
+        (name) => `data/substructure/movement/${deckMaterial(at.option.designs[unit]!)}/${name}`,
+      ),
+    ),
+  };
+};
+
+/** Vessels of the waters a support stands in, and their speeds. */
+const vesselsAt = (at: At): { readonly tonnes: string[]; readonly speeds: string[] } => {
+  const { waters } = at.appraisal.site;
+  const x = at.support.chainageM;
+  const navigable = waters.flatMap(({ fromM, toM, river }, i) =>
+    x >= fromM && x <= toM && (river?.vesselDwtT ?? 0) > 0 ? [`site/waters/${i}/river`] : [],
+  );
+  return {
+    tonnes: navigable.map((river) => `${river}/vesselDwtT`),
+    speeds: navigable.map((river) => `${river}/vesselSpeedMs`),
+  };
+};
+
 /** How the deck is held at a support. */
 export const articulationFigures: readonly Descriptor[] = [
   described({
@@ -49,6 +76,68 @@ export const articulationFigures: readonly Descriptor[] = [
         at.option.units[unit]!.supportsM.map((_, s) => `${at.root}/units/${unit}/supportsM/${s}`),
       ),
     }),
+  }),
+  described({
+    path: support('abutment/integral'),
+    label: on('deck cast into the abutment'),
+    unit: '',
+    method: 'limits of movement and skew',
+    formula:
+      'one unit of a slab, girder or box form, pressed at its ends; movement from its middle and skew within their limits',
+    inputs: (at) => ({
+      ends: ['site/startM', 'site/endM'],
+      skew: 'site/skewDeg',
+      mostSkew: 'data/substructure/integral/mostSkewDeg',
+      most: 'data/substructure/integral/mostMovementMm',
+      ...movementFigures(at),
+    }),
+    sources: ['ba-42-96'],
+  }),
+  described({
+    path: support('articulation/bearings'),
+    when: (at) => at.support.abutment?.integral === true,
+    label: on('bearings'),
+    unit: 'no',
+    method: 'count',
+    formula: 'none, the deck is cast in',
+    inputs: (at) => ({ integral: `${at.foot}/abutment/integral` }),
+    compute: ({ integral }) => (integral === 1 ? 0 : NaN),
+  }),
+  described({
+    path: support('articulation/bearingKind'),
+    label: on('kind of bearings'),
+    unit: '',
+    method: 'choice',
+    formula:
+      'laminated rubber where movement / 2 / strain is low enough and each carries its load; else pots',
+    inputs: (at) => ({
+      load: `${at.foot}/articulation/bearingMN`,
+      bearings: `${at.foot}/articulation/bearings`,
+      strain: 'data/substructure/bearings/rubberStrain',
+      tallest: 'data/substructure/bearings/mostRubberM',
+      most: 'data/substructure/bearings/mostElastomericMN',
+      ...movementFigures(at),
+    }),
+  }),
+  described({
+    path: support('articulation/vesselKN'),
+    label: on('force of a vessel'),
+    unit: 'kN',
+    method: 'head-on impact',
+    formula: '120 V sqrt(DWT), V speed in m/s or its preset, DWT in t',
+    inputs: (at) => ({
+      ...vesselsAt(at),
+      factor: 'data/substructure/vessel/factor',
+      preset: 'data/substructure/vessel/presetSpeedMs',
+    }),
+    compute: ({ tonnes, speeds, factor, preset }) =>
+      Math.max(
+        ...tonnes.map((one, i) => {
+          const speed = speeds[i]!;
+          return factor * (Number.isFinite(speed) ? speed : preset) * Math.sqrt(one);
+        }),
+      ),
+    sources: ['AASHTO LRFD 3.14.8 (from memory)'],
   }),
   described({
     path: support('articulation/bearings'),
@@ -220,7 +309,7 @@ export const articulationFigures: readonly Descriptor[] = [
     label: on('movement of the joint'),
     unit: 'mm',
     method: 'no joint',
-    formula: 'the deck runs through, or is fixed here',
+    formula: 'the deck runs through, is fixed here or cast in',
     inputs: (at) => ({ here: `${at.foot}/chainageM` }),
   }),
   described({

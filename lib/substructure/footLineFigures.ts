@@ -1,5 +1,6 @@
 import { described, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
 import { foundationAt, footPath } from './foundationFigures.ts';
+import { abutmentBarsPath } from './shaftFigures.ts';
 
 const path = 'options/:option/supports/:support/foundations/:f/lines/:line/quantity';
 const lineOf = (at: At): MeasuredLine => foundationAt(at).lines[at.index('line')]!;
@@ -28,7 +29,7 @@ function barsOf(at: At): string {
   const { what } = lineOf(at);
   if (what.endsWith('piles')) return 'data/substructure/piles/barsKgM3';
   if (!what.endsWith('shaft below ground')) return 'data/substructure/footing/barsKgM3';
-  if (at.support.kind === 'abutment') return 'data/substructure/abutment/barsKgM3';
+  if (at.support.kind === 'abutment') return abutmentBarsPath(at);
   return `data/substructure/pier/${at.support.shaft.columns === 2 ? 'columnBarsKgM3' : 'leafBarsKgM3'}`;
 }
 
@@ -208,7 +209,7 @@ export const footLineFigures: readonly Descriptor[] = [
       wall: 'data/substructure/pier/wallM',
     }),
     compute: (v, at) => {
-      const width = v.columns === 2 ? v.length : v.width;
+      const width = v.columns > 1 ? v.length : v.width;
       const hollow =
         at.support.kind !== 'abutment' && at.support.kind !== 'pylon' && v.above - v.foot > v.hollow;
       const inside = hollow ? Math.max(0, v.length - 2 * v.wall) * Math.max(0, width - 2 * v.wall) : 0;

@@ -38,10 +38,14 @@ export function unbalancedFriction(leftKN: readonly number[], rightKN: readonly 
 /** Kind of deck for movements: which materials it holds, read from its measured lines. */
 export type DeckMaterial = 'composite' | 'prestressed' | 'reinforced';
 
+/** Movement of a length, m, through a range of temperature, K, mm: expansion per K x range x length. */
+export const thermalMovement = (expansionPerK: number, rangeK: number, lengthM: number): number =>
+  expansionPerK * rangeK * lengthM * 1000;
+
 /** Movement at a joint, mm: both ways of temperature plus shortening, over the length to the fixed point, m. */
 export function jointMovement(material: DeckMaterial, lengthM: number): number {
   const { expansionPerK, rangeK, shorteningPerM } = substructureData.movement[material];
-  return (expansionPerK * rangeK + shorteningPerM) * lengthM * 1000;
+  return thermalMovement(expansionPerK, rangeK, lengthM) + shorteningPerM * lengthM * 1000;
 }
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);

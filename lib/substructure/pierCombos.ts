@@ -1,15 +1,16 @@
 import type { Combo } from './combos.ts';
 import { substructureData } from './data.ts';
+import type { SeismicLoad } from './seismicLoad.ts';
 import type { Setting } from './setting.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import { upliftKN } from './supportLines.ts';
 
 /** Ratio of allowable loads under accidental to those under characteristic loads. */
-const accidentalCapacity = 1.5;
+export const accidentalCapacity = 1.5;
 
 /**
  * Combinations of loads at the bearings of a pier or pylon: traffic with braking or friction and part of the wind;
- * wind without traffic; uplift where there is any; a vehicle or train striking the shaft where traffic is near.
+ * wind without traffic; uplift where there is any; a vehicle, train or vessel striking the shaft where one can; an earthquake.
  * `windKN` at `windLevelM` is the wind on the shaft itself; `ownKN` its weight.
  */
 export function pierCombos(
@@ -18,7 +19,10 @@ export function pierCombos(
   bearingLevelM: number,
   own: { readonly weightKN: number; readonly windKN: number; readonly windLevelM: number },
 ): Combo[] {
-  const { factors } = substructureData;
+  const {
+    factors,
+    vessel: { alongShare },
+  } = substructureData;
   const wind = ask.acrossKN + own.windKN;
   const windLevelM =
     wind > 0 ? (ask.acrossKN * bearingLevelM + own.windKN * own.windLevelM) / wind : bearingLevelM;
@@ -64,5 +68,38 @@ export function pierCombos(
       ultimate: 1,
     });
   }
+  if (setting.vesselKN !== null && setting.waterLevelM !== null) {
+    const struck = { verticalKN: held, capacity: accidentalCapacity, ultimate: 1 };
+    const level = { alongLevelM: setting.waterLevelM, acrossLevelM: setting.waterLevelM };
+    combos.push({ ...struck, ...level, alongKN: 0, acrossKN: setting.vesselKN });
+    combos.push({ ...struck, ...level, alongKN: alongShare * setting.vesselKN, acrossKN: 0 });
+  }
+  if (setting.seismic !== null)
+    combos.push(...seismicCombos(ask, setting.seismic, bearingLevelM, own.weightKN));
   return combos;
+}
+
+/** Earthquake along the road with a share of it across, and the other way round; no traffic. */
+function seismicCombos(
+  ask: SupportAsk,
+  { pierShare }: SeismicLoad,
+  bearingLevelM: number,
+  shaftKN: number,
+): Combo[] {
+  const { orthogonalShare, shaftShare } = substructureData.seismic;
+  const shaft = shaftShare * shaftKN;
+  const along = pierShare * (Math.max(0, ask.heldAlongKN) + shaft);
+  const across = pierShare * (Math.max(0, ask.permanentKN) + shaft);
+  return [
+    [1, orthogonalShare],
+    [orthogonalShare, 1],
+  ].map(([a = 0, b = 0]) => ({
+    verticalKN: ask.permanentKN + shaftKN,
+    alongKN: a * along,
+    alongLevelM: bearingLevelM,
+    acrossKN: b * across,
+    acrossLevelM: bearingLevelM,
+    capacity: accidentalCapacity,
+    ultimate: 1,
+  }));
 }

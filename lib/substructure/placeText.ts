@@ -1,4 +1,5 @@
 import type { Site } from '../model/index.ts';
+import { slopeRoom } from './frontSlope.ts';
 import { groundUnder } from './groundUnder.ts';
 import { settingAt } from './setting.ts';
 
@@ -12,5 +13,7 @@ export function placeText(site: Site, chainageM: number): string {
     groundUnder(site, chainageM),
     site.deck,
     site.road.fillSideSlope,
+    // Only an abutment has a slope before it.
+    chainageM === site.startM || chainageM === site.endM ? slopeRoom(site, chainageM) : null,
   ]);
 }

@@ -2,6 +2,7 @@ import type { Site } from '../model/index.ts';
 import { flowAt, scourAt, type FlowAt } from '../river/index.ts';
 import { groundAt, waterDepthAt } from '../site/index.ts';
 import { substructureData } from './data.ts';
+import { seismicLoad, type SeismicLoad } from './seismicLoad.ts';
 
 /** What a support meets at one chainage. Levels and depths in metres. */
 export interface Setting {
@@ -16,6 +17,10 @@ export interface Setting {
   readonly flow: FlowAt | null;
   /** Nearest traffic that could strike a support here, with the force at its height, kN and m; null where none is near. */
   readonly impact: { readonly forceKN: number; readonly heightM: number } | null;
+  /** Largest vessel that could strike a support here, its force, kN, at the ordinary water level; null where none can. */
+  readonly vesselKN: number | null;
+  /** Spectral and ground acceleration to design for, shares of gravity; null where none is known. */
+  readonly seismic: SeismicLoad | null;
 }
 
 /**
@@ -42,6 +47,8 @@ export function settingAt(site: Site, chainageM: number): Setting {
     floodDepthM,
     flow: flowAt(site, chainageM),
     impact: impactNear(site, chainageM),
+    vesselKN: vesselAt(site, chainageM),
+    seismic: seismicLoad(site),
   };
 }
 
@@ -54,6 +61,18 @@ function impactNear(site: Site, chainageM: number): Setting['impact'] {
     if (worst === null || forceKN > worst.forceKN) worst = { forceKN, heightM };
   }
   return worst;
+}
+
+/** Force of the largest vessel of the waters a support stands in, kN: 120 V sqrt(DWT), m/s and t; null where none passes. */
+export function vesselAt(site: Site, chainageM: number): number | null {
+  const { factor, presetSpeedMs } = substructureData.vessel;
+  const forces = site.waters.flatMap((water) => {
+    const { vesselDwtT = null, vesselSpeedMs = null } = water.river ?? {};
+    const wet = covers(water, chainageM) && groundAt(site, chainageM) < water.levelM;
+    if (!wet || vesselDwtT === null || !(vesselDwtT > 0)) return [];
+    return [factor * (vesselSpeedMs ?? presetSpeedMs) * Math.sqrt(vesselDwtT)];
+  });
+  return forces.length > 0 ? Math.max(...forces) : null;
 }
 
 const covers = (stretch: { fromM: number; toM: number }, x: number): boolean =>

@@ -1,4 +1,4 @@
-import { described, type At, type Descriptor } from '../model/index.ts';
+import { described, type AbutmentWall, type At, type Descriptor } from '../model/index.ts';
 import { supportName } from './supportFigures.ts';
 
 const support = (steps: string): string => `options/:option/supports/:support/${steps}`;
@@ -10,6 +10,16 @@ const pier = (name: string): string => `data/substructure/pier/${name}`;
 const wall = (name: string): string => `data/substructure/abutment/${name}`;
 
 const isAbutment = (at: At): boolean => at.support.kind === 'abutment';
+const wallOf = (at: At): AbutmentWall => at.support.abutment?.wall ?? 'full height';
+
+/** Where the bars per m3 of an abutment stand, by its kind and whether the deck is cast in. */
+export function abutmentBarsPath(at: At): string {
+  const integral = at.support.abutment?.integral === true;
+  const named = { 'bank seat': 'bankSeat', 'full height': 'fullHeight', 'spill-through': 'spillThrough' };
+  if (wallOf(at) === 'spill-through' && !integral) return wall('spillThroughBarsKgM3');
+  return wall(integral ? `${named[wallOf(at)]}IntegralBarsKgM3` : 'barsKgM3');
+}
+
 const isPylon = (at: At): boolean => at.support.kind === 'pylon';
 
 /** Lines of the support itself by item: concrete or bars of its walls. */
@@ -26,6 +36,8 @@ const pierInputs = (at: At) =>
     design: `${at.foot}/articulation/bearingMN`,
     along: `${at.foot}/articulation/alongKN`,
     across: `${at.foot}/articulation/acrossKN`,
+    struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],
+    earthquake: at.appraisal.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
     stress: pier('axialShare'),
     slenderness: pier('slenderness'),
     step: pier('stepM'),
@@ -42,22 +54,37 @@ const abutmentInputs = (at: At) =>
 /** Shafts of piers, legs of pylons and walls of abutments. */
 export const shaftFigures: readonly Descriptor[] = [
   described({
+    path: support('abutment/wall'),
+    label: on('kind of abutment'),
+    unit: '',
+    method: 'cheapest that fits',
+    formula:
+      'bank seat where the road is little above the ground, else full height; spill-through where its slope meets nothing',
+    inputs: (at) => ({
+      road: `${at.foot}/roadM`,
+      ground: `${at.foot}/groundLevelM`,
+      flood: `${at.foot}/floodDepthM`,
+      bankSeat: wall('bankSeatUpToM'),
+      slope: 'site/road/fillSideSlope',
+      berm: wall('bermM'),
+    }),
+  }),
+  described({
     path: support('footM'),
     when: isAbutment,
     label: on('level of the foot of the walls'),
     unit: 'm',
     method: 'least of two levels',
-    formula: 'seat - depth of its beam; under a full wall at most ground - cover over the cap',
+    formula: 'seat - depth of its beam; under a wall or columns at most ground - cover over the cap',
     inputs: (at) => ({
       road: `${at.foot}/roadM`,
       seat: `${at.foot}/topLevelM`,
       ground: `${at.foot}/groundLevelM`,
-      bankSeat: wall('bankSeatUpToM'),
+      wall: `${at.foot}/abutment/wall`,
       beam: wall('seatBeamM'),
       cover: 'data/substructure/piles/capCoverM',
     }),
-    compute: (v) =>
-      Math.min(v.seat - v.beam, v.road - v.ground <= v.bankSeat ? Infinity : v.ground - v.cover),
+    compute: (v, at) => Math.min(v.seat - v.beam, wallOf(at) === 'bank seat' ? Infinity : v.ground - v.cover),
   }),
   described({
     path: support('footM'),
@@ -71,20 +98,23 @@ export const shaftFigures: readonly Descriptor[] = [
   described({
     path: support('shaft/lengthM'),
     when: isAbutment,
-    label: on('mean thickness of the stem'),
+    label: on('mean thickness of the stem, or side of its columns'),
     unit: 'm',
     method: 'common practice by height',
     formula:
-      'bank seat: least thickness; wall: mean of the least and of the foot, a share of the retained height',
+      'bank seat: least thickness; wall: mean of the least and of the foot, a share of the retained height; columns: a share of it, at least the least',
     inputs: (at) => ({
       ...abutmentInputs(at),
-      ground: `${at.foot}/groundLevelM`,
-      bankSeat: wall('bankSeatUpToM'),
+      wall: `${at.foot}/abutment/wall`,
       least: wall('leastStemM'),
       perHeight: wall('stemPerHeight'),
+      leastColumn: wall('leastColumnM'),
+      columnPerHeight: wall('columnPerHeight'),
     }),
-    compute: (v) => {
-      if (v.road - v.ground <= v.bankSeat) return v.least;
+    compute: (v, at) => {
+      if (wallOf(at) === 'bank seat') return v.least;
+      if (wallOf(at) === 'spill-through')
+        return Math.max(v.leastColumn, v.columnPerHeight * Math.max(0, v.road - v.foot));
       return (v.least + Math.max(v.least, v.perHeight * Math.max(0, v.road - v.foot))) / 2;
     },
   }),
@@ -146,7 +176,7 @@ export const shaftFigures: readonly Descriptor[] = [
     method: 'choice',
     formula: (at) =>
       isAbutment(at)
-        ? 'one wall'
+        ? 'one wall; columns under the beam of a spill-through abutment by their spacing, at least two'
         : isPylon(at)
           ? 'two legs'
           : 'one leaf in a flood, beside traffic or above the height for hollow shafts; two columns with a head elsewhere',
@@ -162,7 +192,7 @@ export const shaftFigures: readonly Descriptor[] = [
     label: on('concrete of the walls'),
     unit: 'm3',
     method: 'sum',
-    formula: 'stem + back wall + wing walls',
+    formula: 'stem or columns with their beam + back wall + wing walls',
     inputs: (at) => ({ walls: linesOf(at, 'abutment-concrete') }),
     compute: ({ walls }) => sum(walls),
   }),
@@ -173,7 +203,7 @@ export const shaftFigures: readonly Descriptor[] = [
     unit: 'kg',
     method: 'product',
     formula: 'concrete x bars per m3',
-    inputs: (at) => ({ concrete: `${at.foot}/shaft/concreteM3`, bars: wall('barsKgM3') }),
+    inputs: (at) => ({ concrete: `${at.foot}/shaft/concreteM3`, bars: abutmentBarsPath(at) }),
     compute: ({ concrete, bars }) => concrete * bars,
   }),
   ...(['concreteM3', 'reinforcementKg'] as const).map((what) =>

@@ -1,46 +1,70 @@
-import type { MeasuredLine, PierShaft, Site, Support } from '../model/index.ts';
+import type { AbutmentWall, MeasuredLine, PierShaft, Site, Support } from '../model/index.ts';
+import { wallLines, wallsOf } from './abutmentWalls.ts';
 import type { Combo } from './combos.ts';
 import { substructureData } from './data.ts';
 import type { FoundationTask } from './foot.ts';
 import { foundationFor } from './foundationFor.ts';
+import { slopeReach, slopeRoom } from './frontSlope.ts';
 import { groundUnder } from './groundUnder.ts';
-import { scourDepth, settingAt } from './setting.ts';
+import { accidentalCapacity } from './pierCombos.ts';
+import { scourDepth, settingAt, type Setting } from './setting.ts';
 import type { SupportAsk } from './supportAsk.ts';
-import { articulationLines, bearingLoadMN, line, upliftKN, waterAccessLines } from './supportLines.ts';
-import { wingFootingLines, wingsOf, wingWallsLine, type Wings } from './wings.ts';
-
-/** Walls of an abutment, m and m3. */
-interface Walls {
-  readonly kind: 'bank seat' | 'full height';
-  readonly stemLengthM: number;
-  readonly stemM3: number;
-  readonly backWallM3: number;
-  readonly wings: Wings;
-}
+import {
+  articulationLines,
+  articulationOf,
+  expectedLines,
+  upliftKN,
+  waterAccessLines,
+} from './supportLines.ts';
 
 /**
- * An abutment: a bank seat where the road is little above the ground, a full-height wall elsewhere, with back wall and two
- * wing walls that reach as far as the side slope of the fill. Active pressure and surcharge go into the foundation;
- * stem thickness is by height (common practice, see the data file).
+ * An abutment, the cheapest of those that fit here: a bank seat where the road is little above the ground; a full-height
+ * wall; columns through fill that spills out to the front where nothing is in its way. With back wall and two wing walls
+ * that reach as far as the side slope of the fill. Active pressure and surcharge go into the foundation, as if nothing
+ * propped it, also where the deck is cast in.
  */
-export function standAbutment(site: Site, ask: SupportAsk): Support {
-  const { bearings, abutment, concrete, piles, factors } = substructureData;
+export function standAbutment(
+  site: Site,
+  ask: SupportAsk,
+  costOf: (lines: readonly MeasuredLine[]) => number,
+): Support {
   const setting = settingAt(site, ask.chainageM);
+  const stood = wallsThatFit(site, ask, setting).map((wall) => standOn(site, ask, setting, wall));
+  // Of equals the plainer one, which comes first.
+  const costs = stood.map((support) => costOf(expectedLines(support)));
+  return stood[costs.indexOf(Math.min(...costs))]!;
+}
+
+/** Kinds of abutment that may be built here, the plainest first. */
+function wallsThatFit(site: Site, ask: SupportAsk, setting: Setting): AbutmentWall[] {
+  const { bearings, abutment } = substructureData;
+  const beamFootM = ask.soffitLevelM - bearings.heightM - abutment.seatBeamM;
+  const low = ask.roadLevelM - setting.groundLevelM <= abutment.bankSeatUpToM;
+  const reachM = slopeReach(site, beamFootM, setting.groundLevelM);
+  const spills =
+    !low &&
+    beamFootM > setting.groundLevelM &&
+    !(setting.floodDepthM > 0) &&
+    reachM <= slopeRoom(site, ask.chainageM);
+  return [low ? 'bank seat' : 'full height', ...(spills ? (['spill-through'] as const) : [])];
+}
+
+function standOn(site: Site, ask: SupportAsk, setting: Setting, wall: AbutmentWall): Support {
+  const { bearings, abutment, concrete, piles, factors } = substructureData;
   const seatM = ask.soffitLevelM - bearings.heightM;
-  const retainedM = ask.roadLevelM - setting.groundLevelM;
-  const bankSeat = retainedM <= abutment.bankSeatUpToM;
   // A bank seat is a beam in the fill; its foundation starts at its underside, not at the original ground.
   const footM = Math.min(
     seatM - abutment.seatBeamM,
-    bankSeat ? Infinity : setting.groundLevelM - piles.capCoverM,
+    wall === 'bank seat' ? Infinity : setting.groundLevelM - piles.capCoverM,
   );
-  const walls = wallsOf(site, ask, seatM, footM, bankSeat ? 'bank seat' : 'full height');
+  const walls = wallsOf(site, ask, { seatM, footM, groundM: setting.groundLevelM }, wall);
+  const concreteM3 = walls.stemM3 + walls.backWallM3 + walls.wings.wallsM3;
   const shaft: PierShaft = {
     lengthM: walls.stemLengthM,
     widthM: site.deck.widthM,
-    columns: 1,
-    concreteM3: walls.stemM3 + walls.backWallM3 + walls.wings.wallsM3,
-    reinforcementKg: (walls.stemM3 + walls.backWallM3 + walls.wings.wallsM3) * abutment.barsKgM3,
+    columns: walls.columns,
+    concreteM3,
+    reinforcementKg: concreteM3 * walls.barsKgM3,
   };
   const weightKN = (walls.stemM3 + walls.backWallM3) * concrete.weightKNm3;
   const task: FoundationTask = {
@@ -48,14 +72,17 @@ export function standAbutment(site: Site, ask: SupportAsk): Support {
     ...(ask.index === undefined ? {} : { support: ask.index }),
     shaftLengthM: walls.stemLengthM,
     shaftWidthM: site.deck.widthM,
-    combos: abutmentCombos(ask, seatM, weightKN),
+    combos: abutmentCombos(ask, setting, seatM, weightKN),
     groundLevelM: Math.min(setting.groundLevelM, footM + piles.capCoverM),
     waterLevelM: setting.waterLevelM,
     scourM: scourDepth(setting, 0),
-    backfill: { topLevelM: ask.roadLevelM, widthM: site.deck.widthM, heelShare: abutment.heelShare },
+    backfill: { topLevelM: ask.roadLevelM, widthM: walls.pressedM, heelShare: abutment.heelShare },
     shaftFootM: footM,
-    shaftAreaM2: walls.stemLengthM * site.deck.widthM,
-    shaftBarsKgM3: abutment.barsKgM3,
+    shaftAreaM2:
+      walls.columns === 1
+        ? walls.stemLengthM * site.deck.widthM
+        : walls.columns * walls.stemLengthM * walls.stemLengthM,
+    shaftBarsKgM3: walls.barsKgM3,
     shaftItem: 'abutment-concrete',
   };
   const ground = groundUnder(site, ask.chainageM);
@@ -70,15 +97,8 @@ export function standAbutment(site: Site, ask: SupportAsk): Support {
     permanentKN: ask.permanentKN,
     trafficKN: ask.trafficKN,
     shaft,
-    articulation: {
-      fixed: ask.fixed,
-      bearings: ask.bearings,
-      bearingMN: bearingLoadMN(ask),
-      alongKN: ask.alongKN,
-      acrossKN: ask.acrossKN * factors.windWithTraffic,
-      jointMovementMm: ask.jointMovementMm,
-      tieDownKN: upliftKN(ask),
-    },
+    abutment: { wall, integral: ask.castIn === true },
+    articulation: articulationOf(ask, ask.acrossKN * factors.windWithTraffic),
     lines: [
       ...articulationLines(ask, site.deck),
       ...wallLines(ask, walls),
@@ -88,43 +108,7 @@ export function standAbutment(site: Site, ask: SupportAsk): Support {
   };
 }
 
-function wallsOf(site: Site, ask: SupportAsk, seatM: number, footM: number, kind: Walls['kind']): Walls {
-  const { abutment } = substructureData;
-  const width = site.deck.widthM;
-  const stemHeight = Math.max(0, seatM - footM);
-  const height = Math.max(0, ask.roadLevelM - footM);
-  const footThickness = Math.max(abutment.leastStemM, abutment.stemPerHeight * height);
-  const stemLengthM = kind === 'bank seat' ? abutment.leastStemM : (abutment.leastStemM + footThickness) / 2;
-  return {
-    kind,
-    stemLengthM,
-    stemM3: stemLengthM * stemHeight * width,
-    backWallM3: Math.max(0, ask.roadLevelM - seatM) * abutment.backWallM * width,
-    wings: wingsOf(site, height),
-  };
-}
-
-function wallLines(ask: SupportAsk, walls: Walls): MeasuredLine[] {
-  const { barsKgM3 } = substructureData.abutment;
-  const wall = walls.stemM3 + walls.backWallM3;
-  const bars = (wall + walls.wings.wallsM3) * barsKgM3;
-  const name = ask.name;
-  return [
-    line(
-      ask,
-      'abutments',
-      'abutment-concrete',
-      wall,
-      `${name} ${walls.kind}`,
-      `stem ${walls.stemLengthM.toFixed(2)} m thick, back wall`,
-    ),
-    wingWallsLine(ask, walls.wings),
-    line(ask, 'abutments', 'reinforcement', bars, `${name} walls`, `${barsKgM3} kg/m3`),
-    ...wingFootingLines(ask, walls.wings),
-  ];
-}
-
-function abutmentCombos(ask: SupportAsk, seatM: number, weightKN: number): Combo[] {
+function abutmentCombos(ask: SupportAsk, { seismic }: Setting, seatM: number, weightKN: number): Combo[] {
   const { factors } = substructureData;
   const across = { acrossKN: ask.acrossKN * factors.windWithTraffic, acrossLevelM: seatM };
   const along = { alongKN: ask.alongKN, alongLevelM: seatM, capacity: 1, ultimate: 1 };
@@ -135,5 +119,18 @@ function abutmentCombos(ask: SupportAsk, seatM: number, weightKN: number): Combo
   ];
   const uplift = upliftKN(ask);
   if (uplift > 0) combos.push({ ...along, ...across, verticalKN: factors.favourable * weightKN - uplift });
+  if (seismic !== null) {
+    // What the abutment holds moves with the ground; sliding bearings pass their friction on.
+    const shaken = seismic.groundShare * (Math.max(0, ask.heldAlongKN) + weightKN);
+    combos.push({
+      verticalKN: held,
+      alongKN: Math.max(shaken, ask.heldAlongKN > 0 ? 0 : ask.alongKN),
+      alongLevelM: seatM,
+      acrossKN: seismic.groundShare * (Math.max(0, ask.permanentKN) + weightKN),
+      acrossLevelM: seatM,
+      capacity: accidentalCapacity,
+      ultimate: 1,
+    });
+  }
   return combos;
 }

@@ -7,7 +7,13 @@ import { pierCombos } from './pierCombos.ts';
 import { scourDepth, settingAt } from './setting.ts';
 import { sectionArea, sizeShaft } from './sizeShaft.ts';
 import type { SupportAsk } from './supportAsk.ts';
-import { articulationLines, bearingLoadMN, shaftLines, upliftKN, waterAccessLines } from './supportLines.ts';
+import {
+  articulationLines,
+  articulationOf,
+  bearingLoadMN,
+  shaftLines,
+  waterAccessLines,
+} from './supportLines.ts';
 
 /** A pier, anchor pier or pylon foot with one foundation for each ground class of its stretch. */
 export function standPier(site: Site, ask: SupportAsk): Support {
@@ -78,15 +84,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     permanentKN: ask.permanentKN,
     trafficKN: ask.trafficKN,
     shaft,
-    articulation: {
-      fixed: ask.fixed,
-      bearings: ask.bearings,
-      bearingMN: designMN,
-      alongKN: ask.alongKN,
-      acrossKN: ask.acrossKN,
-      jointMovementMm: ask.jointMovementMm,
-      tieDownKN: upliftKN(ask),
-    },
+    articulation: articulationOf(ask, ask.acrossKN, setting.vesselKN),
     lines: [
       ...articulationLines(ask, site.deck),
       ...shaftLines(ask, shaft, 'piers', 'pier-concrete', how),

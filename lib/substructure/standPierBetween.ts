@@ -62,6 +62,8 @@ export function standPierBetween(
     alongKN: substructureData.friction.coefficient * permanentKN,
     acrossKN: windOnDeck(deck.depthM, length),
     fixed: false,
+    heldAlongKN: 0,
+    bearingMovementMm: 0,
     bearings: substructureData.bearings.perLine,
     jointMovementMm: 0,
   });

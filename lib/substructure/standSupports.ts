@@ -4,6 +4,7 @@ import { groundAt, roadLevelAt, waterDepthAt } from '../site/index.ts';
 import type { Hold } from './articulate.ts';
 import { articulate, depthOver } from './articulate.ts';
 import { substructureData } from './data.ts';
+import { integralEnds } from './integralEnds.ts';
 import { pylonFoot } from './pylonFoot.ts';
 
 import { standOneSupport } from './standOneSupport.ts';
@@ -53,11 +54,22 @@ export function standSupports(
     });
   });
   const chainages = [...meetings.keys()].sort((a, b) => a - b);
+  const castIn = integralEnds(site, units, designs);
   return chainages.map((chainageM, index) => {
     const end = index === 0 || index === chainages.length - 1;
-    return stand(site, askAt(site, profile, chainageM, index, end, meetings.get(chainageM)!));
+    const ask = askAt(site, profile, chainageM, index, end, meetings.get(chainageM)!);
+    return stand(site, end && castIn ? withoutJoint(ask) : ask);
   });
 }
+
+/** An abutment with the deck cast into it. */
+const withoutJoint = (ask: SupportAsk): SupportAsk => ({
+  ...ask,
+  castIn: true,
+  bearings: 0,
+  jointMovementMm: 0,
+  bearingMovementMm: 0,
+});
 
 function askAt(
   site: Site,
@@ -101,6 +113,8 @@ function askAt(
         : Math.max(...meetings.map(({ hold }) => hold.alongKN)),
     acrossKN: meetings.reduce((sum, { hold }) => sum + hold.acrossKN, 0),
     fixed: integral !== undefined || fixed.length > 0,
+    heldAlongKN: fixed.reduce((sum, { hold }) => sum + hold.heldKN, 0),
+    bearingMovementMm: integral ? 0 : Math.max(...meetings.map(({ hold }) => hold.movementMm)),
     bearings: integral ? 0 : meetings.length * substructureData.bearings.perLine,
     jointMovementMm: joint ? meetings.reduce((sum, { hold }) => sum + hold.movementMm, 0) : 0,
     ...pylon,

@@ -21,8 +21,14 @@ export interface SupportAsk {
   /** Wind across at deck level, without traffic. */
   readonly acrossKN: number;
   readonly fixed: boolean;
+  /** Permanent load of all that this support holds along the road in an earthquake, kN; 0 where bearings slide. */
+  readonly heldAlongKN: number;
+  /** The deck is cast into this abutment: no bearings, no joint. */
+  readonly castIn?: boolean;
   readonly bearings: number;
   readonly jointMovementMm: number;
+  /** Movement of the bearings, both ways together, mm; 0 where the deck is held. */
+  readonly bearingMovementMm: number;
   /** Wall in one with the deck, measured with it; its loads stand for all others but wind. */
   readonly integral?: IntegralWall;
   /** Pylon only: its own weight, kN, its height above its foot, m, and the plan it stands on, m. */

@@ -1,4 +1,5 @@
-import type { BillPart, DeckSpec, MeasuredLine, PierShaft, Support } from '../model/index.ts';
+import type { Articulation, BillPart, DeckSpec, MeasuredLine, PierShaft, Support } from '../model/index.ts';
+import { bearingKind } from './bearingKind.ts';
 import { substructureData } from './data.ts';
 import type { SupportAsk } from './supportAsk.ts';
 
@@ -20,12 +21,33 @@ export function jointElements(movementMm: number): number {
   return Math.ceil(movementMm / substructureData.movement.jointGroupMm - 1e-9);
 }
 
+/** How the deck is held at a support, wind across given. */
+export function articulationOf(
+  ask: SupportAsk,
+  acrossKN: number,
+  vesselKN: number | null = null,
+): Articulation {
+  const bearingMN = bearingLoadMN(ask);
+  return {
+    fixed: ask.fixed,
+    bearings: ask.bearings,
+    bearingMN,
+    alongKN: ask.alongKN,
+    acrossKN,
+    jointMovementMm: ask.jointMovementMm,
+    tieDownKN: upliftKN(ask),
+    ...(ask.bearings > 0 ? { bearingKind: bearingKind(ask.bearingMovementMm, bearingMN, ask.bearings) } : {}),
+    ...(vesselKN === null ? {} : { vesselKN }),
+  };
+}
+
 /** Bearings, joint and tie-down of a support. */
 export function articulationLines(ask: SupportAsk, deck: Pick<DeckSpec, 'widthM'>): MeasuredLine[] {
   const lines: MeasuredLine[] = [];
   const load = bearingLoadMN(ask);
-  if (load > 0) {
-    const how = `${ask.bearings} bearings, ${load.toFixed(1)} MN together`;
+  if (load > 0 && ask.bearings > 0) {
+    const kind = bearingKind(ask.bearingMovementMm, load, ask.bearings);
+    const how = `${ask.bearings} ${kind} bearings, ${load.toFixed(1)} MN together, moving ${Math.round(ask.bearingMovementMm)} mm`;
     lines.push(line(ask, 'bearings-joints', 'bearing', load, `${ask.name} bearings`, how));
   }
   const elements = jointElements(ask.jointMovementMm);

@@ -16,6 +16,8 @@ const is =
     );
   };
 
+const isSpill = (at: At): boolean => at.support.abutment?.wall === 'spill-through';
+
 /** Height that the walls retain, from their foot to the road, and the length of the wings at the side slope. */
 const wings = (at: At) =>
   ({
@@ -89,6 +91,69 @@ export const wallLineFigures: readonly Descriptor[] = [
     }),
     compute: (v) =>
       (v.thickness * Math.max(0, v.seat - v.foot) + Math.max(0, v.road - v.seat) * v.backWall) * v.width,
+  }),
+  described({
+    path,
+    when: is('abutment-concrete', 'spill-through'),
+    label,
+    unit: 'm3',
+    method: 'volume',
+    formula:
+      'columns x side^2 x (foot of the beam - foot) + (beam thickness x its depth + back wall x (road - seat)) x deck width',
+    inputs: (at) => ({
+      ...wings(at),
+      seat: `${at.foot}/topLevelM`,
+      side: `${at.foot}/shaft/lengthM`,
+      columns: `${at.foot}/shaft/columns`,
+      beam: wall('seatBeamM'),
+      least: wall('leastStemM'),
+      backWall: wall('backWallM'),
+      width: 'site/deck/widthM',
+    }),
+    compute: (v) =>
+      v.columns * v.side ** 2 * Math.max(0, v.seat - v.beam - v.foot) +
+      (v.least * v.beam + Math.max(0, v.road - v.seat) * v.backWall) * v.width,
+  }),
+  described({
+    path,
+    when: is('fill', 'front slope'),
+    label,
+    unit: 'm3',
+    method: 'volume',
+    formula:
+      'W (berm h + s h^2 / 2) + pi s^2 h^3 / 6: h from the ground to the foot of the beam, s side slope',
+    inputs: (at) => ({
+      seat: `${at.foot}/topLevelM`,
+      beam: wall('seatBeamM'),
+      ground: `${at.foot}/groundLevelM`,
+      berm: wall('bermM'),
+      slope: 'site/road/fillSideSlope',
+      width: 'site/deck/widthM',
+    }),
+    compute: (v) => {
+      const h = Math.max(0, v.seat - v.beam - v.ground);
+      return v.width * (v.berm * h + (v.slope * h * h) / 2) + (Math.PI * v.slope ** 2 * h ** 3) / 6;
+    },
+  }),
+  described({
+    path,
+    when: (at) => isSpill(at) && is('abutment-concrete', 'wing walls')(at),
+    label,
+    unit: 'm3',
+    method: 'volume',
+    formula: 'two wings: side slope x h long, mean height x h high; h from the foot of the beam to the road',
+    inputs: (at) => ({
+      road: `${at.foot}/roadM`,
+      seat: `${at.foot}/topLevelM`,
+      beam: wall('seatBeamM'),
+      slope: 'site/road/fillSideSlope',
+      mean: wall('wingMeanHeight'),
+      thickness: wall('wingM'),
+    }),
+    compute: (v) => {
+      const h = Math.max(0, v.road - (v.seat - v.beam));
+      return 2 * v.slope * h * v.mean * h * v.thickness;
+    },
   }),
   described({
     path,

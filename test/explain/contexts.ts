@@ -56,7 +56,7 @@ export const otherwise = (): Context =>
     };
   });
 
-/** The same crossing with its river known and piers standing in it: flow and velocity, bed, afflux allowed. */
+/** The same crossing with its river known and piers standing in it: flow and velocity, bed, afflux allowed, vessels, and an earthquake. */
 export const inFlood = (): Context =>
   once('inFlood', () => {
     const study = lowFerry();
@@ -65,6 +65,7 @@ export const inFlood = (): Context =>
       ...study,
       brief: {
         ...brief,
+        crossing: { ...brief.crossing, groundAccelerationG: 0.16, siteClass: 'C' },
         obstacles: brief.obstacles.map((one) =>
           one.kind === 'river' ? { ...one, supports: 'none', clearance: null } : one,
         ),
@@ -74,6 +75,7 @@ export const inFlood = (): Context =>
           velocityMs: 1.5,
           allowedAffluxM: 0.1,
           grainMm: 2,
+          vesselDwtT: 40,
         })),
       },
       books: { ...study.books, draws: 300 },

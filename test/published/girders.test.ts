@@ -5,6 +5,7 @@ import { girderFigures } from '../../lib/forms/composite-i/girderSection.ts';
 import { compositeI } from '../../lib/forms/composite-i/index.ts';
 import { sectionProperties, type SectionPart } from '../../lib/mechanics/index.ts';
 import type { UnitTask } from '../../lib/model/index.ts';
+import { upliftKN } from '../../lib/substructure/supportLines.ts';
 import { girderTask, plainDeck } from '../forms/composite-i/cases.ts';
 
 const inch = 0.0254;
@@ -107,4 +108,23 @@ describe('steel of twin-girder decks', () => {
       expect(least / law(spanM)).toBeLessThan(1.15);
     },
   );
+});
+
+describe('uplift at the ends of composite girders', () => {
+  /** Design uplift at the end supports of three spans with an end span of a share of the interior span, kN. */
+  const liftOf = (share: number): number => {
+    const spansM = [60 * share, 60, 60 * share];
+    const { reactions } = compositeI.size(girderTask(spansM, 2.6));
+    return Math.max(
+      ...[reactions[0]!, reactions.at(-1)!].map(({ permanentKN, trafficMinKN }) =>
+        upliftKN({ permanentKN, trafficLeastKN: trafficMinKN }),
+      ),
+    );
+  };
+
+  it('compositeI.size(end over interior 0.40) lifts under factored loads, 0.60 stays pressed', () => {
+    // Common practice (from memory): uplift below about 0.4 under dead load, none from about 0.55 on under live load.
+    expect(liftOf(0.4)).toBeGreaterThan(0);
+    expect(liftOf(0.6)).toBe(0);
+  });
 });

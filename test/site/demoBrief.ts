@@ -26,6 +26,8 @@ export function plainBrief(change: Partial<Brief> = {}): Brief {
         { chainageM: 100, levelM: 0 },
       ],
       planRadiusM: 'straight',
+      groundAccelerationG: 'unknown',
+      siteClass: 'unknown',
       skewDeg: 0,
     },
     road: {

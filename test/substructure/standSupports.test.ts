@@ -122,8 +122,13 @@ it('standPierBetween(flood plain) founds below the scoured ground and protects t
 });
 
 it('standOneSupport(abutment) holds more concrete the higher it stands', () => {
+  // A road right in front leaves no room for a slope: these are walls.
+  const beside: Site = {
+    ...crossing,
+    zones: [{ fromM: 2, toM: 12, hard: true, kind: 'road', name: 'Mill Lane' }],
+  };
   const at = (roadLevelM: number): Support =>
-    standOneSupport(crossing, {
+    standOneSupport(beside, {
       name: 'start abutment',
       kind: 'abutment',
       chainageM: 0,
@@ -137,6 +142,8 @@ it('standOneSupport(abutment) holds more concrete the higher it stands', () => {
       fixed: false,
       bearings: 2,
       jointMovementMm: 60,
+      heldAlongKN: 0,
+      bearingMovementMm: 60,
     });
   const heights = [2, 5, 8, 11].map((h) => sum(expectedLines(at(h)), 'abutment-concrete'));
   expect(heights).toEqual([...heights].sort((a, b) => a - b));
