@@ -1,4 +1,5 @@
 import type { EvidenceCase } from '../caseInputs.ts';
+import { precastBeam } from './precastBeam.ts';
 import { sizedForm } from './sizedForm.ts';
 import { continuousBeam, influenceOrdinates, patternedBeam } from './beams.ts';
 import { parabola, stayModulus, stayVolumes } from './cables.ts';
@@ -41,5 +42,6 @@ export const evidenceCases: Readonly<Record<string, EvidenceCase>> = {
   parabola,
   'stay modulus': stayModulus,
   'stay volumes': stayVolumes,
+  'precast beam as laid out': precastBeam,
   'sized form': sizedForm,
 };

@@ -29,12 +29,19 @@ function task(spansM: readonly number[], depthM: number, standard: StandardId = 
 
 describe('splicePlan(spansM, mostM)', () => {
   it('cuts a continuous unit beside its piers: 0.22 of 60 m, and once more where an end is too long', () => {
-    const { longestM, splices, atM } = splicePlan([48, 60, 48], 50);
+    const { longestM, splices, atM } = splicePlan([55, 60, 55], 50);
     expect(splices).toEqual([1, 2, 1]);
-    // 48 - 10.56; 48 + 13.2; 48 + 46.8; 108 + 10.56.
-    [37.44, 61.2, 94.8, 118.56].forEach((x, i) => expect(atM[i]).toBeCloseTo(x, 9));
-    expect(longestM).toBeCloseTo(37.44, 9);
+    // 55 - 12.1; 55 + 13.2; 55 + 46.8; 115 + 12.1.
+    [42.9, 68.2, 101.8, 127.1].forEach((x, i) => expect(atM[i]).toBeCloseTo(x, 9));
+    expect(longestM).toBeCloseTo(42.9, 9);
     expect(splicePlan([48, 60, 48], 30).splices).toEqual([2, 3, 2]);
+  });
+
+  it('leaves spans whole that the road takes', () => {
+    const { longestM, splices, atM } = splicePlan([48, 60, 48], 50);
+    expect(splices).toEqual([0, 2, 0]);
+    [61.2, 94.8].forEach((x, i) => expect(atM[i]).toBeCloseTo(x, 9));
+    expect(longestM).toBe(48);
   });
 
   it('cuts a span by itself in three, never at midspan', () => {
@@ -56,7 +63,7 @@ describe('precastI.size(task) past the length of the road', () => {
     const cut = precastI.size(task([50, 51, 50], 2.4));
     expect(whole.staging).toBeUndefined();
     expect(quantityOf(whole.lines, 'temporary-tower')).toBe(0);
-    expect(cut.staging).toEqual({ splices: 4, stages: 2 });
+    expect(cut.staging).toEqual({ splices: 2, stages: 2 });
     expect(quantityOf(cut.lines, 'temporary-tower')).toBeGreaterThan(0);
     expect(quantityOf(cut.lines, 'prestress')).toBeGreaterThan(0);
   });

@@ -9,7 +9,7 @@ import { elementsPerSpan, precastModel, type PrecastModel } from '../../common/p
 import { pretensioned } from '../../common/precast/pretensioned.ts';
 import { mostStrands, strandCentroidM } from '../../common/precast/strandRows.ts';
 import { iBeams } from '../iBeams.ts';
-import { splicePlan, type SplicePlan } from './splicePlan.ts';
+import { pierReachM, splicePlan, type SplicePlan } from './splicePlan.ts';
 import { splicedData } from './splicedData.ts';
 
 /** Spliced beams: the beam that carries most, its weight on the continuous beam, its pieces and the shape of its tendons. */
@@ -128,7 +128,6 @@ function leastStraight(model: PrecastModel, lengthM: number): number {
  * where none do. Those of a piece over a pier hold it while it is handled and are not counted on.
  */
 function spotsOf({ beam, task }: PrecastModel, plan: SplicePlan): Spot[] {
-  const { atOverSpan } = splicedData.splices;
   const fade = pretensioned.relief.debonded.endOver;
   const last = task.spansM.length - 1;
   const places: Spot[] = [];
@@ -137,10 +136,14 @@ function spotsOf({ beam, task }: PrecastModel, plan: SplicePlan): Spot[] {
   const upTo = same ? Math.ceil((beam.xM.length - 1) / 2) : beam.xM.length;
   task.spansM.forEach((spanM, span) => {
     const from = beam.supportAt[span]!;
+    const [leftM, rightM] = pierReachM(task.spansM, span, pretensioned.haul.lengthM);
+    // Nothing of the bed is counted on in pieces over a pier; other ends are debonded.
+    const part = (share: number, reachM: number): number =>
+      reachM > 0 ? Number(share * spanM > reachM) : Math.min(1, share / fade);
     for (let k = span === 0 ? 0 : 1; k <= elementsPerSpan; k++) {
       const share = k / elementsPerSpan;
-      const left = span > 0 ? Number(share > atOverSpan) : Math.min(1, share / fade);
-      const right = span < last ? Number(1 - share > atOverSpan) : Math.min(1, (1 - share) / fade);
+      const left = part(share, leftM);
+      const right = part(1 - share, rightM);
       const i = from + k;
       places.push({
         i: Math.min(i, beam.xM.length - 2),
