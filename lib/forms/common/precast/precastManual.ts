@@ -4,26 +4,20 @@ import { precastCheckFigures } from './checkFigures.ts';
 import { staticsFigures } from './staticsFigures.ts';
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
-const bars = [
-  'links of the beams',
-  'bars along the beams',
-  'transverse bars of the slab',
-  'longitudinal bars of the slab',
-  'bars over the piers',
-  'connection at beam ends',
-  'bars of the diaphragms',
-];
+
 /** Precast beams: layout, section, strands and quantities, their checks. Figures are of one beam unless named otherwise. */
 export function precastManual(form: FormId): Descriptor[] {
   const { figure, sized, line } = formManual(form);
-  const perM2 = (name: string, label: string, unit: string, formula: string, ...what: readonly string[]) =>
+  const perM2 = (name: string, label: string, unit: string, formula: string, ...items: readonly string[]) =>
     figure(name, {
       label,
       unit,
       method: 'ratio',
       formula: `${formula} / (length x deck width)`,
       inputs: (at: At) => ({
-        lines: linesOf(at, ...what),
+        lines: at.design.lines.flatMap(({ item }, i) =>
+          items.includes(item) ? [`${at.unit}/lines/${i}/quantity`] : [],
+        ),
         spans: spansOf(at),
         width: `${at.unit}/task/deck/widthM`,
       }),
@@ -177,13 +171,12 @@ export function precastManual(form: FormId): Descriptor[] {
       'concreteM3M2',
       'concrete per m2 of deck',
       'm3/m2',
-      'beams, slab and diaphragms',
-      'precast beams',
-      'deck slab',
-      'diaphragms',
+      'all concrete',
+      'precast-concrete',
+      'deck-concrete',
     ),
-    perM2('strandKgM2', 'strand per m2 of deck', 'kg/m2', 'strand', 'strand in beams'),
-    perM2('barsKgM2', 'bars per m2 of deck', 'kg/m2', 'all bars', ...bars),
+    perM2('strandKgM2', 'strand per m2 of deck', 'kg/m2', 'all strand', 'pretensioned-strand', 'prestress'),
+    perM2('barsKgM2', 'bars per m2 of deck', 'kg/m2', 'all bars', 'reinforcement'),
     ...staticsFigures(form),
     line('bars along the beams', {
       label: 'bars along the beams',

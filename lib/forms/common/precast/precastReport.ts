@@ -88,7 +88,7 @@ export function precastFigures(
     superimposedKNm: model.superimposedKNm,
     liftingSafety: liftingSafety(model, heaviestBeam(model).lengthM),
     concreteM3M2: (quantityOf(lines, 'precast-concrete') + quantityOf(lines, 'deck-concrete')) / areaM2,
-    strandKgM2: quantityOf(lines, 'pretensioned-strand') / areaM2,
+    strandKgM2: (quantityOf(lines, 'pretensioned-strand') + quantityOf(lines, 'prestress')) / areaM2,
     barsKgM2: quantityOf(lines, 'reinforcement') / areaM2,
   };
   const moments = noMoments();

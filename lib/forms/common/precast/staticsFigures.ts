@@ -59,7 +59,7 @@ export function staticsFigures(form: FormId): Descriptor[] {
       'own weight on the span by itself, the rest on it or on the continuous beam, less what draped strands carry',
       'spans',
       'laneVehicles',
-      'span#Strands',
+      'span#Strands*',
     ),
     sized(
       'span*Strands',
