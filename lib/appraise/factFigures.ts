@@ -1,6 +1,7 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { factDictionary } from '../rules/index.ts';
 import { asIs, fact, factOf, factsOf } from './factFigure.ts';
+import { methodFactFigures } from './methodFactFigures.ts';
 import { riverFactFigures } from './riverFactFigures.ts';
 import { supportFactFigures } from './supportFactFigures.ts';
 import { mainUnit, spansOf } from './workOption.ts';
@@ -162,6 +163,7 @@ export const factFigures: readonly Descriptor[] = [
   ),
   ...supportFactFigures,
   ...riverFactFigures,
+  ...methodFactFigures,
   asIs('haulLengthM', () => ({ given: 'brief/access/haulLengthM' })),
   asIs('haulMassT', () => ({ given: 'brief/access/haulMassT' })),
   asIs('craneStands', () => ({ given: 'brief/access/crane' })),

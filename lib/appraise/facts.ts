@@ -3,6 +3,7 @@ import { roadLevelAt, constructionDepth, groundAt, waterDepthAt } from '../site/
 import { quantitiesOf } from '../takeoff/index.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 import { curveFacts } from './curveFacts.ts';
+import { crossedFacts, methodFacts } from './methodFacts.ts';
 import { riverFacts } from './riverFacts.ts';
 import { supportFacts } from './supportFacts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
@@ -83,6 +84,7 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
     supportsBarred: inner.filter(barred).length,
     // A study has one radius for the whole crossing.
     radiusConstant: site.planRadiusM === null ? 'unknown' : true,
+    ...crossedFacts(site, option.units, option.method),
     ...(option.method === 'falsework' ? falseworkOver(site, main) : {}),
     ...(main.pylons ? { pylons: main.pylons.length, sideSpanRatio: sideSpanRatio(main, main.pylons) } : {}),
     ...(spans.length > 1 && !main.pylons ? { endSpanRatio: endSpanRatio(spans) } : {}),
@@ -113,6 +115,7 @@ export function optionFacts(
     ...arrangementFacts(site, option),
     ...supportFacts(site, option),
     ...riverFacts(site, option),
+    ...methodFacts(site, option, access),
     falseworkHeightM: option.method === 'falsework' ? falseworkHeightM(site, option, main) : 0,
     haunched: design.depthM.support !== design.depthM.midspan,
     prestressed: quantitiesOf(design.lines).prestressKg > 0,

@@ -1,10 +1,12 @@
 import { z } from 'zod';
 import type { AskedOf, FormId } from '../model/index.ts';
 import { familyOf, formIds } from '../model/index.ts';
+import methodFactsJson from '../../data/rules/facts-methods.json';
 import riverFactsJson from '../../data/rules/facts-river.json';
 import supportFactsJson from '../../data/rules/facts-supports.json';
 import factsJson from '../../data/rules/facts.json';
 import generalJson from '../../data/rules/general.json';
+import methodsJson from '../../data/rules/methods.json';
 import riverJson from '../../data/rules/river.json';
 import supportsJson from '../../data/rules/supports.json';
 import sourcesJson from '../../data/sources.json';
@@ -17,7 +19,7 @@ const ruleFile = z.strictObject({ rules: z.array(ruleSchema) });
 const factFile = z.strictObject({ facts: z.array(factSchema) });
 
 const facts: ReadonlyMap<string, Fact> = new Map(
-  [factsJson, supportFactsJson, riverFactsJson].flatMap((file) =>
+  [factsJson, supportFactsJson, riverFactsJson, methodFactsJson].flatMap((file) =>
     factFile.parse(file).facts.map((entry) => [entry.id, entry] as const),
   ),
 );
@@ -30,9 +32,13 @@ const sources: ReadonlyMap<string, Source> = new Map(
 );
 
 /** Every rule of the project, form by form and then the general ones. */
-export const rules: readonly Rule[] = [...formRuleFiles, generalJson, supportsJson, riverJson].flatMap(
-  (file) => ruleFile.parse(file).rules,
-);
+export const rules: readonly Rule[] = [
+  ...formRuleFiles,
+  generalJson,
+  supportsJson,
+  riverJson,
+  methodsJson,
+].flatMap((file) => ruleFile.parse(file).rules);
 
 checkBook(rules, facts, sources);
 
