@@ -46,6 +46,15 @@ function endRatio(spans: readonly number[]): number {
   return Math.min(spans[0]! / spans[1]!, spans.at(-1)! / spans.at(-2)!);
 }
 
+/** Inner supports inside the hard or the soft stretches of the site. */
+const standing = (id: string, formula: string, isHard: boolean): Descriptor =>
+  fact(id, formula, (at) => ({
+    supports: supports(at),
+    zones: at.appraisal.site.zones.flatMap(({ hard }, i) =>
+      hard === isHard ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
+    ),
+  }));
+
 /** What the rules are asked with, fact by fact. */
 export const factFigures: readonly Descriptor[] = [
   fact(
@@ -77,12 +86,12 @@ export const factFigures: readonly Descriptor[] = [
     (at) => ({ depths: innerSupports(at, 'waterDepthM') }),
     ({ depths }) => depths.filter((depth) => depth > 0).length,
   ),
-  fact('supportsBarred', 'supports inside a stretch where none may stand', (at) => ({
-    supports: supports(at),
-    zones: at.appraisal.site.zones.flatMap(({ hard }, i) =>
-      hard ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
-    ),
-  })),
+  standing(
+    'supportsBarred',
+    'inner supports, each with half a pier, inside a stretch where none may stand',
+    true,
+  ),
+  standing('supportsSoft', 'inner supports with their axis inside a stretch open at a price', false),
   fact('unitLengthM', 'end - start of the main unit', mainEnds, ({ from, to }) => to - from),
   fact('radiusConstant', 'a study has one radius for the whole crossing', () => ({
     radius: 'site/planRadiusM',

@@ -67,11 +67,13 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
   const main = mainUnit(option.units);
   const spans = spansOf(main);
   const all = [...new Set(option.units.flatMap((unit) => unit.supportsM))];
-  const barred = (x: number): boolean =>
-    site.zones.some(
-      ({ hard, fromM, toM }) =>
-        hard && x > fromM - PIER_HALF_WIDTH_M + SAME_M && x < toM + PIER_HALF_WIDTH_M - SAME_M,
-    );
+  /** Inner supports inside a hard stretch, half a pier counted with them, or with their axis inside a soft one. */
+  const standingIn = (isHard: boolean): number => {
+    const beside = isHard ? PIER_HALF_WIDTH_M : 0;
+    const holds = (zone: Site['zones'][number], x: number): boolean =>
+      zone.hard === isHard && x > zone.fromM - beside + SAME_M && x < zone.toM + beside - SAME_M;
+    return all.slice(1, -1).filter((x) => site.zones.some((zone) => holds(zone, x))).length;
+  };
   const inner = all.slice(1, -1);
   return {
     ...formFacts(site),
@@ -81,7 +83,8 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
     method: option.method,
     unitLengthM: main.supportsM.at(-1)! - main.supportsM[0]!,
     supportsInRiver: inner.filter((x) => waterDepthAt(site, x) > 0).length,
-    supportsBarred: inner.filter(barred).length,
+    supportsBarred: standingIn(true),
+    supportsSoft: standingIn(false),
     // A study has one radius for the whole crossing.
     radiusConstant: site.planRadiusM === null ? 'unknown' : true,
     ...crossedFacts(site, option.units, option.method),

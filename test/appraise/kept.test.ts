@@ -1,5 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { appraise, memory, type Appraisal, type FormId, type Unit } from '../../lib/index.ts';
+import { arrangementFacts } from '../../lib/appraise/facts.ts';
+import { rulingsFor } from '../../lib/rules/index.ts';
+import { survey } from '../../lib/site/index.ts';
 import { lowFerry } from './studies.ts';
 
 const kept = memory();
@@ -59,5 +62,32 @@ describe('appraise(option kept by hand)', { timeout: 60_000 }, () => {
     expect(dropped.because.join()).toMatch(why);
     expect(appraisal.options.length).toBeGreaterThan(0);
     expect(appraisal.retired).not.toContain(1);
+  });
+});
+
+describe('arrangementFacts(pier in a soft stretch)', () => {
+  const { brief } = lowFerry();
+  const garden = {
+    kind: 'heritage',
+    name: 'walled garden',
+    fromM: 1400,
+    toM: 1420,
+    clearance: null,
+  } as const;
+  const cautions = (supports: 'soft' | 'none', pierM: number): readonly string[] => {
+    const site = survey({ ...brief, obstacles: [...brief.obstacles, { ...garden, supports }] });
+    const units: Unit[] = [{ form: 'composite-i', role: 'main', supportsM: [1240, 1300, pierM, 1470] }];
+    const rulings = rulingsFor(
+      'arrangement',
+      'composite-i',
+      arrangementFacts(site, { units, method: 'crane' }),
+    );
+    return rulings.filter(({ effect }) => effect === 'caution').map(({ rule }) => rule);
+  };
+
+  it('warns of it, and of nothing on its edge or where supports are free', () => {
+    expect(cautions('soft', 1410)).toContain('support-soft');
+    expect(cautions('soft', 1400)).not.toContain('support-soft');
+    expect(cautions('none', 1410)).not.toContain('support-soft');
   });
 });
