@@ -4,7 +4,7 @@ import { appraiseOptionAt } from './appraiseOption.ts';
 import { drawn } from './drawn.ts';
 import { between, BEYOND_ABUTMENT } from './keptUnits.ts';
 import type { Memory } from './memory.ts';
-import { requestFor } from './requestFor.ts';
+import { patternOf, requestFor } from './requestFor.ts';
 import { workbench } from './workbench.ts';
 import { mainUnit } from './workOption.ts';
 
@@ -45,7 +45,7 @@ export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory
   const depthM = depthsM[units.indexOf(mainUnit(units))]!;
   const option: Option = { number, form, method, units, depthM, origin: 'kept' };
   const onDraws = drawn(bench, [...new Set(units.map((unit) => unit.form))]);
-  const faults = faultsOf(units, requestFor(option, site), site);
+  const faults = faultsOf(units, requestFor(option, site, patternOf(form, units)), site);
   try {
     return { option: appraiseOptionAt(bench, onDraws, option, depthsM).option, faults };
   } catch (error) {

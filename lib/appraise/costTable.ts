@@ -1,6 +1,7 @@
 import { formModule } from '../forms/index.ts';
 import type { CostTable, FormId } from '../model/index.ts';
 import type { Memory, TrialRow } from './memory.ts';
+import { openSpans } from './openSpans.ts';
 import { PIER_LOADS_KN, trialPiers } from './trialPiers.ts';
 import { SHARES, trialRows, type FormAndMethod, type RowMakers, type TrialRows } from './trialRows.ts';
 
@@ -33,6 +34,7 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
     shelf.set(key, found);
     return found;
   };
+  const isOpen = (form: FormId): boolean => openSpans(form, makers.site.lengthM) !== undefined;
   const usual = (form: FormId): FormAndMethod => ({ form, method: formModule(form).methods[0] });
 
   const pierCost = trialPiers(makers, piers);
@@ -74,10 +76,12 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
   return {
     tableFor,
     rowsOf(asked) {
-      const { pattern } = formModule(asked.form);
-      return pattern.kind === 'continuous'
-        ? [rowsFor(asked)]
-        : [rowsFor(asked), rowsFor(usual(pattern.approach))];
+      const { pattern, alsoPattern } = formModule(asked.form);
+      const approach = pattern.kind === 'continuous' ? alsoPattern?.approach : pattern.approach;
+      return [
+        rowsFor(asked),
+        ...(approach !== undefined && isOpen(approach) ? [rowsFor(usual(approach))] : []),
+      ];
     },
   };
 }

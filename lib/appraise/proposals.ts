@@ -1,6 +1,6 @@
 import { arrange } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { Arrangement, FormId, MethodId } from '../model/index.ts';
+import type { Arrangement, FormId, MethodId, Pattern, Site } from '../model/index.ts';
 import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import { arrangementFacts, formFacts } from './facts.ts';
@@ -51,6 +51,20 @@ export function* proposalsFor(bench: Workbench, form: FormId): Work<Proposals> {
   return store.get(key) ?? store.put(key, yield* search(bench, form));
 }
 
+/** Patterns of a form that are searched on a site: approaches to a flanked unit need something to lead up to and their own spans. */
+function patternsFor(site: Site, form: FormId): readonly Pattern[] {
+  const { pattern, alsoPattern } = formModule(form);
+  const also = alsoPattern && site.mainOpening && openSpans(alsoPattern.approach, site.lengthM);
+  return also ? [pattern, alsoPattern] : [pattern];
+}
+
+const supportsOf = ({ units }: Arrangement): number =>
+  units.reduce((sum, { supportsM }) => sum + supportsM.length - 1, 1);
+
+/** Options are told apart by their number of supports: the cheaper of two with as many stays. */
+const isFirstOfItsSupports = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
+  all.findIndex((other) => supportsOf(other) === supportsOf(one)) === i;
+
 function* search(bench: Workbench, form: FormId): Work<Proposals> {
   const { site } = bench;
   const counts = new Map<string, number>();
@@ -63,11 +77,15 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
     for (const rows of bench.tables.rowsOf(asked)) {
       for (const index of rows.spansM.keys()) yield* rows.make(index);
     }
-    const result = arrange(requestFor(asked, site), site, bench.tables.tableFor(asked));
-    for (const dropped of result.dropped) count(dropped.reason, dropped.count);
-    because.push(...result.relaxations.map(relaxationWords));
-    yield;
-    return result.arrangements;
+    const found: Arrangement[] = [];
+    for (const pattern of patternsFor(site, form)) {
+      const result = arrange(requestFor(asked, site, pattern), site, bench.tables.tableFor(asked));
+      for (const dropped of result.dropped) count(dropped.reason, dropped.count);
+      if (found.length === 0) because.push(...result.relaxations.map(relaxationWords));
+      found.push(...result.arrangements);
+      yield;
+    }
+    return found.sort((a, b) => a.tableCost - b.tableCost).filter(isFirstOfItsSupports);
   };
 
   const byMethod: (readonly Arrangement[])[] = [];

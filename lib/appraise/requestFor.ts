@@ -1,6 +1,6 @@
 import type { ArrangeRequest, Windows } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { FormId, Site } from '../model/index.ts';
+import type { FormId, Pattern, Site, Unit } from '../model/index.ts';
 import { endRatioWindow, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import type { FormAndMethod } from './trialRows.ts';
@@ -28,13 +28,23 @@ function continuousWindows(form: FormId, site: Site): Windows {
 }
 
 /**
- * What the search is asked for one form and method: its pattern and the windows that the rules leave open.
+ * What the search is asked for one form and method: a pattern of the form and the windows that the rules leave open.
  * @throws RangeError where the rules of a continuous form say nothing of end spans: a fault of the book
  */
-export function requestFor({ form, method }: FormAndMethod, site: Site): ArrangeRequest {
-  const { pattern } = formModule(form);
+export function requestFor(
+  { form, method }: FormAndMethod,
+  site: Site,
+  pattern: Pattern = formModule(form).pattern,
+): ArrangeRequest {
   const base = { form, method, pattern, pierHalfWidthM: PIER_HALF_WIDTH_M };
   if (pattern.kind === 'continuous') return { ...base, windows: continuousWindows(form, site) };
+  if (pattern.kind === 'flanked') {
+    return {
+      ...base,
+      windows: continuousWindows(form, site),
+      approach: continuousWindows(pattern.approach, site),
+    };
+  }
   const band = spanBand(form, site);
   return {
     ...base,
@@ -42,4 +52,10 @@ export function requestFor({ form, method }: FormAndMethod, site: Site): Arrange
     windows: pattern.kind === 'pylon' ? { ...band, minSpacingM: HUNG_SPACING * band.minSpanM } : band,
     approach: continuousWindows(pattern.approach, site),
   };
+}
+
+/** The pattern of a row of units of a form: that of the form, or the other one that the form has when there are approaches. */
+export function patternOf(form: FormId, units: readonly Unit[]): Pattern {
+  const { pattern, alsoPattern } = formModule(form);
+  return alsoPattern && units.some(({ role }) => role === 'approach') ? alsoPattern : pattern;
 }

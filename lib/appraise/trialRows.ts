@@ -35,8 +35,8 @@ const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.
 function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number[]; pylons?: number[] } {
   const pattern = formModule(form).pattern;
   if (pattern.kind === 'simple-main') return { spansM: [spanM] };
-  if (pattern.kind === 'continuous') {
-    if (pattern.mostSpans === 1) return { spansM: [spanM] };
+  if (pattern.kind === 'continuous' || pattern.kind === 'flanked') {
+    if (pattern.kind === 'continuous' && pattern.mostSpans === 1) return { spansM: [spanM] };
     return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
   }
   const [least, most] =

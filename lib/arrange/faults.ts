@@ -22,6 +22,15 @@ function mainSpanOf(unit: Unit): readonly [number, number] {
   return pylon - left >= right - pylon ? [left, pylon] : [pylon, right];
 }
 
+/** Ends of the longest span of a unit. */
+function longestSpanOf({ supportsM }: Unit): readonly [number, number] {
+  let at = 1;
+  for (let i = 2; i < supportsM.length; i += 1) {
+    if (supportsM[i]! - supportsM[i - 1]! > supportsM[at]! - supportsM[at - 1]!) at = i;
+  }
+  return [supportsM[at - 1]!, supportsM[at]!];
+}
+
 /** Faults of a main unit on pylons: main span in its band, back or side spans in their windows, supports apart. */
 function pylonFault(unit: Unit, limits: Limits, request: ArrangeRequest): string | null {
   const { pattern } = request;
@@ -44,7 +53,11 @@ function missesOpening(unit: Unit, request: ArrangeRequest, site: Site): boolean
   const opening = site.mainOpening;
   if (unit.role !== 'main' || request.pattern.kind === 'continuous' || opening === null) return false;
   const [from, to] =
-    request.pattern.kind === 'pylon' ? mainSpanOf(unit) : [unit.supportsM[0]!, unit.supportsM.at(-1)!];
+    request.pattern.kind === 'pylon'
+      ? mainSpanOf(unit)
+      : request.pattern.kind === 'flanked'
+        ? longestSpanOf(unit)
+        : [unit.supportsM[0]!, unit.supportsM.at(-1)!];
   return from > opening.fromM + SAME_M || to < opening.toM - SAME_M;
 }
 

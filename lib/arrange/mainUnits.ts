@@ -6,7 +6,7 @@ import { halfCosts, supportCosts, type SupportCosts } from './curves.ts';
 import type { Frame } from './frame.ts';
 import { limitsOf, SLACK, type Limits } from './limits.ts';
 import type { MainLayout, MainSearch } from './mainSearch.ts';
-import { pylonCost, pylonLayouts, spanRows } from './pylons.ts';
+import { pylonCost, pylonLayouts, sidesOf, spanRows } from './pylons.ts';
 import { refine } from './refine.ts';
 import type { ArrangeRequest } from './request.ts';
 import { simpleCost, simpleLayouts } from './simpleMain.ts';
@@ -76,7 +76,8 @@ function approachesFromEnd(
 
 /** How far a main unit may reach beyond its main span, as a share of that. */
 function reachOf({ pattern }: ArrangeRequest): number {
-  return pattern.kind === 'pylon' ? Math.max(pattern.onePylonBack[1], pattern.twoPylonSide[1]) : 0;
+  const sides = sidesOf(pattern);
+  return sides ? Math.max(sides.one?.[1] ?? 0, sides.two[1]) : 0;
 }
 
 interface Ranges {
@@ -139,6 +140,7 @@ export function mainUnitCandidates(
   const keyOf = (pylons: number, spans: number, mainM: number): number =>
     (pylons * MOST_SPANS + spans) * MOST_SPANS + Math.round(mainM / classM);
   const rowOf = spanRows({ request, table });
+  const sides = sidesOf(pattern);
   const search: MainSearch = {
     request,
     limits,
@@ -154,9 +156,7 @@ export function mainUnitCandidates(
     toLeft: approachesTo(pattern.approach, X, ...ranges.outerLeft, approachLimits, supports, table),
     toRight: approachesFromEnd(pattern.approach, X, ...ranges.outerRight, approachLimits, supports, table),
     ownCost: (at, pylons) =>
-      pattern.kind === 'pylon'
-        ? pylonCost(search, pattern, rowOf, at, pylons)
-        : simpleCost(search, at[0]!, at[1]!),
+      sides ? pylonCost(search, sides, rowOf, at, pylons) : simpleCost(search, at[0]!, at[1]!),
     wants(pylons, spans, mainM, cost) {
       const known = best.get(keyOf(pylons, spans, mainM));
       return known === undefined || cost < known.cost * (1 - 1e-9);
@@ -170,7 +170,7 @@ export function mainUnitCandidates(
     isEnough: () => best.size >= enough,
     noApproach: () => dropped.add('no approach spans within their windows'),
   };
-  if (pattern.kind === 'pylon') pylonLayouts(search, pattern, rowOf);
+  if (sides) pylonLayouts(search, sides, rowOf);
   else simpleLayouts(search);
   const strides = [ranges.left, ranges.right, ranges.outerLeft, ranges.outerRight].map(([first, last]) =>
     strideOf(first, last),
@@ -180,7 +180,7 @@ export function mainUnitCandidates(
   for (const { at, pylons, before, after, cost } of best.values()) {
     const placed: PlacedUnit[] = [];
     if (before.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: before.at });
-    placed.push(pylons.length > 0 ? { form, role: 'main', at, pylons } : { form, role: 'main', at });
+    placed.push(sides?.hung === true ? { form, role: 'main', at, pylons } : { form, role: 'main', at });
     if (after.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: after.at });
     found.push({ placed, estimate: cost });
   }

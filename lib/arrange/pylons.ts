@@ -123,7 +123,22 @@ function twoPylons(search: MainSearch, main: Main, window: readonly [number, num
   return rights.length > 0;
 }
 
-type PylonPattern = Extract<Pattern, { kind: 'pylon' }>;
+/** How the spans beside a main span are laid out. */
+export interface Sides {
+  /** Back span over the main span of a unit with one pylon; null where there must be a side span at both ends. */
+  readonly one: readonly [least: number, most: number] | null;
+  /** Side spans over the main span of a unit with two. */
+  readonly two: readonly [least: number, most: number];
+  /** The piers of the main span are pylons, with their fixed cost. */
+  readonly hung: boolean;
+}
+
+/** Sides of a main unit; null for patterns whose main unit has none. */
+export function sidesOf(pattern: Pattern): Sides | null {
+  if (pattern.kind === 'pylon') return { one: pattern.onePylonBack, two: pattern.twoPylonSide, hung: true };
+  if (pattern.kind === 'flanked') return { one: null, two: pattern.side, hung: false };
+  return null;
+}
 
 /** Rows of span costs by whole metre of main span. */
 export type SpanRows = (mainM: number) => SpanCosts;
@@ -142,10 +157,10 @@ export function spanRows({ table, request }: Pick<MainSearch, 'table' | 'request
   };
 }
 
-/** Deck, fixed cost and supports of a hung unit without anchor piers; null where its spans break their windows. */
+/** Deck, fixed cost and supports of a unit with sides, without anchor piers; null where its spans break their windows. */
 export function pylonCost(
   search: MainSearch,
-  pattern: PylonPattern,
+  sides: Sides,
   rowOf: SpanRows,
   at: readonly number[],
   pylons: readonly number[],
@@ -160,9 +175,10 @@ export function pylonCost(
   if (!(mainM >= limits.minSpanM - SLACK && mainM <= limits.maxSpanM + SLACK)) return null;
   if (at[m]! > search.latestLeft || at[m + 1]! < search.earliestRight) return null;
   if (pylons.some((p) => at[p] === 0 || at[p] === last)) return null;
-  const window = one ? pattern.onePylonBack : pattern.twoPylonSide;
+  const window = one ? sides.one : sides.two;
+  if (window === null) return null;
   const row = rowOf(mainM);
-  let cost = table.unitFixed(request.form, mainM, pylons.length);
+  let cost = table.unitFixed(request.form, mainM, sides.hung ? pylons.length : 0);
   for (let s = 0; s < x.length - 1; s += 1) {
     const span = x[s + 1]! - x[s]!;
     if (s !== m && !(span >= window[0] * mainM - SLACK && span <= Math.min(window[1], 1) * mainM + SLACK))
@@ -174,8 +190,8 @@ export function pylonCost(
   return { cost, mainM };
 }
 
-/** Main units hung from one pylon (on either side of the opening) or two: every pair of places in the span band. */
-export function pylonLayouts(search: MainSearch, pattern: PylonPattern, rowOf: SpanRows): void {
+/** Main units with a side beyond one end of the main span (on either side of the opening) or both: every pair of places in the span band. */
+export function pylonLayouts(search: MainSearch, sides: Sides, rowOf: SpanRows): void {
   const { X, limits, left, right, table, request } = search;
   for (const a of left) {
     if (search.isEnough()) return;
@@ -189,13 +205,13 @@ export function pylonLayouts(search: MainSearch, pattern: PylonPattern, rowOf: S
         b,
         mainM,
         row,
-        onePylon: deck + table.unitFixed(request.form, mainM, 1),
-        twoPylons: deck + table.unitFixed(request.form, mainM, 2),
+        onePylon: deck + table.unitFixed(request.form, mainM, sides.hung ? 1 : 0),
+        twoPylons: deck + table.unitFixed(request.form, mainM, sides.hung ? 2 : 0),
       };
       const laid = [
-        onePylon(search, main, pattern.onePylonBack, true),
-        onePylon(search, main, pattern.onePylonBack, false),
-        twoPylons(search, main, pattern.twoPylonSide),
+        sides.one !== null && onePylon(search, main, sides.one, true),
+        sides.one !== null && onePylon(search, main, sides.one, false),
+        twoPylons(search, main, sides.two),
       ];
       if (!laid.includes(true)) search.noApproach();
     }

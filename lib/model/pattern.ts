@@ -7,6 +7,15 @@ export type Pattern =
   /** A main unit of one simple span over the obstacle; approach units of another form on either side where needed. */
   | { readonly kind: 'simple-main'; readonly approach: FormId }
   /**
+   * A continuous main unit of three spans, the longest over the obstacle; approach units of another form on either side where
+   * needed. `side` is the side span over the main span.
+   */
+  | {
+      readonly kind: 'flanked';
+      readonly approach: FormId;
+      readonly side: readonly [least: number, most: number];
+    }
+  /**
    * A main unit hung from one or two pylons; approach units where needed.
    * `onePylonBack` and `twoPylonSide` are the back or side span over the main span that the form is laid out with.
    */

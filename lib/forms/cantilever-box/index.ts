@@ -21,6 +21,7 @@ export const cantileverBox: FormModule = {
   family: 'box',
   name: 'Cantilevered concrete box',
   pattern: { kind: 'continuous' },
+  alsoPattern: { kind: 'flanked', approach: 'concrete-box', side: [0.55, 0.7] },
   methods: ['balanced-cantilever'],
   size,
 };
