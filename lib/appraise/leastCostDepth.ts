@@ -113,8 +113,10 @@ export function* leastCostDepth(
   const limit = Math.min(flat(final), (1 + FLAT) * (curve?.least ?? Infinity));
   const line = (on: number): number =>
     outside[1].cost + ((inside[1].cost - outside[1].cost) * (on - outside[0])) / (inside[0] - outside[0]);
-  for (let on = outside[0] + 1; on < inside[0]; on += 1) {
-    if ((curve?.at ?? line)(on) <= limit) return on / STEPS;
-  }
-  return inside[0] / STEPS;
+  let on = outside[0] + 1;
+  while (on < inside[0] && !((curve?.at ?? line)(on) <= limit)) on += 1;
+  // Plates and strands go in steps: what was read off the curve has to hold where it is worked out.
+  yield* visit(on);
+  const there = tried.get(on)!;
+  return (there.utilisation <= 1 && there.cost <= limit ? on : inside[0]) / STEPS;
 }
