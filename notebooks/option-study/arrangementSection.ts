@@ -8,6 +8,7 @@ import { formLooks } from '../forms/formLook.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
+import { riverTable } from './riverTable.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
 
@@ -106,7 +107,7 @@ export function arrangementSection(page: Sheet, store: StudyStore, cells: StudyC
         const drawing = toDom(stack(input), document);
         listenToStack(drawing);
         drawing.addEventListener(chooseReference, chosen);
-        return [drawing, droppedTable(v.appraisal)];
+        return [drawing, riverTable(v.appraisal), droppedTable(v.appraisal)];
       },
     }),
     page.cell({

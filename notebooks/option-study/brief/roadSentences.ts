@@ -31,7 +31,36 @@ export function waterSentence({ fields, height }: InWords, { brief }: Study, ind
     ],
     '; the soffit stays ',
     height(at('freeboardM'), 'freeboard', { min: { value: 0 }, max: { value: 50 } }),
-    ' m above the flood. ',
+    ' m above the flood. The flood runs at ',
+    fields.figure(at('flowM3s'), {
+      label: 'flow of the flood',
+      places: 0,
+      unit: 'm3/s',
+      step: 10,
+      unknown: 'an unknown number of',
+      from: 100,
+      min: { value: 0, open: true },
+      max: { value: 1e6 },
+    }),
+    ' m³/s over a bed of ',
+    fields.figure(at('grainMm'), {
+      label: 'median grain of the bed',
+      places: 2,
+      unit: 'mm',
+      step: 0.1,
+      unknown: 'an unknown number of',
+      from: 1,
+      min: { value: 0, open: true },
+      max: { value: 1000 },
+    }),
+    ' mm grain; it may rise by ',
+    height(at('allowedAffluxM'), 'allowed afflux', {
+      unknown: 'an unknown number of',
+      from: 0.2,
+      min: { value: 0 },
+      max: { value: 10 },
+    }),
+    ' m before the bridge. ',
   ];
 }
 
