@@ -1,3 +1,3 @@
 /** The shapes of the pipeline as the pages read them: one place to import them from. */
 export type * from '../lib/index.ts';
-export { billParts, constructionDepth, families, familyOf, formIds } from '../lib/index.ts';
+export { billParts, constructionDepth, families, familyOf, formIds, roadLevelAt } from '../lib/index.ts';

@@ -9,6 +9,7 @@ import { optionFacts } from './facts.ts';
 import { remembered } from '../kept.ts';
 import { requestFor } from './requestFor.ts';
 import { riversCrossed } from './riversCrossed.ts';
+import { hundredMm } from './hundredMm.ts';
 import type { Work } from './work.ts';
 import { mainUnit, spareOf, workOption, workOptionAt, type Worked } from './workOption.ts';
 import type { Workbench } from './workbench.ts';
@@ -75,6 +76,7 @@ function judged(
       supportQuantities: supports,
       headroom,
       rivers: riversCrossed(site, worked),
+      hundredMm: hundredMm(bench, worked),
       deckAreaM2,
       cost: priced.cost,
       quartiles: priced.quartiles,

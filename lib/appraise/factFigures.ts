@@ -120,7 +120,7 @@ export const factFigures: readonly Descriptor[] = [
     'falseworkHeightM',
     'greatest height from ground to soffit under the main unit; 0 without falsework',
     (at) => ({
-      road: [`${at.root}/profile/startLevelM`, `${at.root}/profile/endLevelM`],
+      road: at.option.profile.pieces.map((_, i) => `${at.root}/profile/pieces/${i}/levelM`),
       depth: `${at.root}/depthM/midspan`,
       ground: at.option.supports.map((_, s) => `${at.root}/supports/${s}/groundLevelM`),
     }),
@@ -189,12 +189,7 @@ export const factFigures: readonly Descriptor[] = [
     ({ rises }) => Math.max(...rises),
   ),
   asIs('roadMayRiseM', () => ({ may: 'site/road/mayRiseM' })),
-  fact(
-    'gradient',
-    'steepness of the road, either way',
-    (at) => ({ gradient: `${at.root}/profile/gradient` }),
-    ({ gradient }) => Math.abs(gradient),
-  ),
+  asIs('gradient', (at) => ({ steepest: `${at.root}/profile/steepestGradient` })),
   asIs('maxGradient', () => ({ steepest: 'site/road/maxGradient' })),
   asIs('headroomSpareM', (at) => ({
     spare: `${at.root}/headroom${at.option.headroom === null ? '' : '/spareM'}`,

@@ -57,7 +57,7 @@ function falseworkHeightM(site: Site, option: WorkedOption, main: Unit): number 
   const from = main.supportsM[0]!;
   const to = main.supportsM.at(-1)!;
   const soffit = (x: number): number =>
-    roadLevelAt(site, option.profile, x) - constructionDepth(site.deck, option.depthM.midspan);
+    roadLevelAt(option.profile, x) - constructionDepth(site.deck, option.depthM.midspan);
   const points = [...site.groundX.filter((x) => x > from && x < to), from, to];
   return Math.max(...points.map((x) => soffit(x) - groundAt(site, x)));
 }
@@ -136,7 +136,7 @@ export function optionFacts(
     budgetChance,
     roadRiseM: Math.max(option.profile.startRiseM, option.profile.endRiseM),
     roadMayRiseM: site.road.mayRiseM,
-    gradient: Math.abs(option.profile.gradient),
+    gradient: option.profile.steepestGradient,
     maxGradient: site.road.maxGradient,
   };
   if (headroom) known['headroomSpareM'] = headroom.spareM;

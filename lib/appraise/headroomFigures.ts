@@ -1,5 +1,6 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { depthAt } from '../site/depthAlong.ts';
+import { levelOnRoad, onRoad, onRoadFormula } from '../site/onRoad.ts';
 import { constructionDepth, roadLevelAt } from '../site/index.ts';
 import { depthAlong, spareOf } from './workOption.ts';
 
@@ -104,17 +105,11 @@ export const headroomFigures: readonly Descriptor[] = [
     path: overPlace('roadM'),
     label: (at) => `road level at ${place(at)}`,
     unit: 'm',
-    method: 'straight line',
-    formula: 'start level + (end level - start level) x distance / length',
-    value: (at) => roadLevelAt(at.appraisal.site, at.option.profile, place(at)),
-    inputs: (at) => ({
-      start: `${at.root}/profile/startLevelM`,
-      end: `${at.root}/profile/endLevelM`,
-      x: `${at.root}/over/${at.name('x')}/chainageM`,
-      from: 'site/startM',
-      length: 'site/lengthM',
-    }),
-    compute: ({ start, end, x, from, length }) => start + ((end - start) * (x - from)) / length,
+    method: 'vertical alignment',
+    formula: onRoadFormula,
+    value: (at) => roadLevelAt(at.option.profile, place(at)),
+    inputs: (at) => onRoad(at, place(at), `${at.root}/over/${at.name('x')}/chainageM`),
+    compute: (v) => levelOnRoad(v),
   }),
   described({
     path: 'options/:option/headroom',

@@ -3,11 +3,14 @@ import { roadLevelAt, type DepthAlong } from '../site/index.ts';
 import { depthAt } from '../site/depthAlong.ts';
 import { depthAlong } from './workOption.ts';
 
-/** One thing that holds the road line where it is. */
-type Hold =
-  | { readonly by: 'clearance'; readonly limit: number; readonly chainageM: number }
-  | { readonly by: 'rise'; readonly end: 'start' | 'end' }
-  | { readonly by: 'gradient'; readonly sign: 1 | -1 };
+/** A clearance that the soffit touches, and where. */
+interface Touch {
+  readonly limit: number;
+  readonly chainageM: number;
+}
+
+const ends = ['start', 'end'] as const;
+type End = (typeof ends)[number];
 
 const depthOf = (at: At): DepthAlong => depthAlong(at.appraisal.site, at.option.units, at.option.designs);
 
@@ -20,96 +23,74 @@ function placesUnder(site: Site, limit: Site['soffitLimits'][number], depth: Dep
 
 const TOUCHES = 1e-6;
 
-/**
- * What holds the ends of the road: the clearance at which the line touches, and where both ends are lifted a second
- * one, or the rise or the gradient that allows no more. Empty where the line touches nothing.
- */
-function holdsOn(at: At): Hold[] {
+/** The clearance that holds the road up: the first at which the soffit touches inside the crossing; null where none does. */
+function touchOn(at: At): Touch | null {
   const { site } = at.appraisal;
   const { profile } = at.option;
   const depth = depthOf(at);
-  const touched = site.soffitLimits.flatMap((limit, i): Hold[] =>
-    placesUnder(site, limit, depth)
-      .filter((x) => Math.abs(roadLevelAt(site, profile, x) - depthAt(depth, x) - limit.levelM) < TOUCHES)
-      .map((chainageM) => ({ by: 'clearance', limit: i, chainageM })),
-  );
-  if (touched.length === 0) return [];
-  if (profile.startRiseM === 0 || profile.endRiseM === 0) return touched.slice(0, 1);
-  const apart = touched.filter(
-    (hold) => hold.by === 'clearance' && hold.chainageM !== (touched[0] as { chainageM: number }).chainageM,
-  );
-  const most = site.road.mayRiseM;
-  const second: Hold | undefined =
-    Math.abs(Math.abs(profile.gradient) - site.road.maxGradient) < TOUCHES
-      ? { by: 'gradient', sign: profile.gradient > 0 ? 1 : -1 }
-      : Math.abs(profile.startRiseM - most) < TOUCHES
-        ? { by: 'rise', end: 'start' }
-        : Math.abs(profile.endRiseM - most) < TOUCHES
-          ? { by: 'rise', end: 'end' }
-          : apart[0];
-  return second === undefined ? [] : [touched[0]!, second];
+  for (const [i, limit] of site.soffitLimits.entries()) {
+    const chainageM = placesUnder(site, limit, depth).find(
+      (x) => Math.abs(roadLevelAt(profile, x) - depthAt(depth, x) - limit.levelM) < TOUCHES,
+    );
+    if (chainageM !== undefined) return { limit: i, chainageM };
+  }
+  return null;
 }
 
-/** Inputs of a rise: what holds the line, and the proposed road. */
-function riseInputs(at: At) {
-  const holds = holdsOn(at).flatMap((hold) => (hold.by === 'clearance' ? [hold] : []));
-  const over = (what: string): string[] => holds.map((hold) => `${at.root}/over/${hold.chainageM}/${what}`);
-  return {
-    limits: holds.map((hold) => `site/soffitLimits/${hold.limit}/levelM`),
-    depths: over('depthM'),
-    chainages: over('chainageM'),
-    start: 'site/road/startLevelM',
-    end: 'site/road/endLevelM',
-    from: 'site/startM',
-    length: 'site/lengthM',
-    mayRise: 'site/road/mayRiseM',
-    steepest: 'site/road/maxGradient',
-  } as const;
-}
-
-/** Rises of both ends from what holds them: one or two straight conditions a x start + b x end = need. */
-function risesOf(
-  v: {
-    readonly limits: readonly number[];
-    readonly depths: readonly number[];
-    readonly chainages: readonly number[];
-    readonly start: number;
-    readonly end: number;
-    readonly from: number;
-    readonly length: number;
-    readonly mayRise: number;
-    readonly steepest: number;
-  },
-  at: At,
-): { readonly start: number; readonly end: number } {
-  let clear = 0;
-  const rows = holdsOn(at).map((hold): readonly [number, number, number] => {
-    if (hold.by === 'rise') return hold.end === 'start' ? [1, 0, v.mayRise] : [0, 1, v.mayRise];
-    if (hold.by === 'gradient') return [-1, 1, hold.sign * v.steepest * v.length - (v.end - v.start)];
-    const share = (v.chainages[clear]! - v.from) / v.length;
-    const need = v.limits[clear]! + v.depths[clear]! - v.start - share * (v.end - v.start);
-    clear += 1;
-    return [1 - share, share, need];
-  });
-  const [one, two] = rows;
-  if (one === undefined) return { start: NaN, end: NaN };
-  if (two === undefined) return { start: one[2] / one[0], end: one[2] / one[1] };
-  const determinant = one[0] * two[1] - one[1] * two[0];
-  return {
-    start: (one[2] * two[1] - two[2] * one[1]) / determinant,
-    end: (one[0] * two[2] - two[0] * one[2]) / determinant,
-  };
-}
-
-const fixed = (at: At, end: 'start' | 'end'): boolean => {
+const fixed = (at: At, end: End): boolean => {
   const { fixedEnd } = at.appraisal.site.road;
   return fixedEnd === end || fixedEnd === 'both';
 };
 
-const rises = (end: 'start' | 'end'): Descriptor[] => {
+const riseOf = (at: At, end: End): number => at.option.profile[`${end}RiseM`];
+const other = (end: End): End => (end === 'start' ? 'end' : 'start');
+
+/** Whether the road between the abutments is one line: straight, or one arc from end to end. */
+function oneLine(at: At): boolean {
+  const { startM, endM } = at.appraisal.site;
+  return at.option.profile.pieces.some(({ fromM, toM }) => fromM === startM && toM === endM);
+}
+
+/** What a road that touches a clearance is worked out from. */
+function touchInputs(at: At) {
+  const touch = touchOn(at)!;
+  const over = `${at.root}/over/${touch.chainageM}`;
+  return {
+    limit: `site/soffitLimits/${touch.limit}/levelM`,
+    depth: `${over}/depthM`,
+    x: `${over}/chainageM`,
+    start: 'site/road/startLevelM',
+    end: 'site/road/endLevelM',
+    from: 'site/startM',
+    length: 'site/lengthM',
+  } as const;
+}
+
+type TouchValues = { readonly [K in keyof ReturnType<typeof touchInputs>]: number };
+
+/** Height that the proposed road lacks at the place that decides, m, and its distance from both ends. */
+function shortage(v: TouchValues): { readonly shortM: number; readonly a: number; readonly b: number } {
+  const a = v.x - v.from;
+  const shortM = v.limit + v.depth - v.start - ((v.end - v.start) * a) / v.length;
+  return { shortM, a, b: v.length - a };
+}
+
+/** Inputs of what is found by search. */
+const searched = (at: At) => {
+  const touch = touchOn(at);
+  return {
+    limits: touch === null ? [] : [`site/soffitLimits/${touch.limit}/levelM`],
+    proposed: ['site/road/startLevelM', 'site/road/endLevelM'],
+    mayRise: 'site/road/mayRiseM',
+    steepest: 'site/road/maxGradient',
+    crest: 'site/roadCurves/crestRadiusM',
+  } as const;
+};
+
+const rises = (end: End): Descriptor[] => {
   const path = `options/:option/profile/${end}RiseM`;
   const label = `rise of the road at the ${end}`;
-  const riseOf = (at: At): number => at.option.profile[`${end}RiseM`];
+  const method = 'lowest road that clears';
   return [
     described({
       path,
@@ -122,55 +103,171 @@ const rises = (end: 'start' | 'end'): Descriptor[] => {
     }),
     described({
       path,
-      when: (at) => riseOf(at) > 0 && holdsOn(at).length > 0,
+      when: (at) =>
+        riseOf(at, end) > 0 && riseOf(at, other(end)) === 0 && oneLine(at) && touchOn(at) !== null,
       label,
       unit: 'm',
-      method: 'lowest line that clears',
+      method,
       formula:
-        'lowest soffit + construction depth = road level at the place that decides; share of the rise there by distance',
-      inputs: riseInputs,
-      compute: (v, at) => risesOf(v, at)[end],
+        'height that the proposed road lacks at the place that decides, less that of the crest there (a b / 2R), by its share of the distance',
+      inputs: (at) => ({
+        ...touchInputs(at),
+        radius: at.option.profile.crestRadiusM === null ? [] : [`${at.root}/profile/crestRadiusM`],
+      }),
+      compute: ({ radius, ...v }) => {
+        const { shortM, a, b } = shortage(v);
+        const [R] = radius;
+        return (shortM - (R === undefined ? 0 : (a * b) / (2 * R))) / ((end === 'start' ? b : a) / v.length);
+      },
     }),
     described({
       path,
       label,
       unit: 'm',
-      method: 'lowest line that clears',
+      method,
       formula: (at) =>
-        riseOf(at) > 0
-          ? 'no line clears everything: this one misses by least'
-          : 'smallest sum of rises; none is needed here',
-      inputs: () => ({
-        mayRise: 'site/road/mayRiseM',
-        limits: [],
-      }),
+        riseOf(at, end) > 0
+          ? 'as little as the clearance, the gradients and the crest allow; shared between free ends so that their fill is least'
+          : 'none is needed here',
+      inputs: searched,
     }),
   ];
 };
 
-const end = (which: 'start' | 'end'): Descriptor =>
+const level = (end: End): Descriptor =>
   described({
-    path: `options/:option/profile/${which}LevelM`,
-    label: `road level at the ${which}`,
+    path: `options/:option/profile/${end}LevelM`,
+    label: `road level at the ${end}`,
     unit: 'm',
     method: 'sum',
     formula: 'proposed level + rise',
     inputs: (at) => ({
-      proposed: `site/road/${which}LevelM`,
-      rise: `${at.root}/profile/${which}RiseM`,
+      proposed: `site/road/${end}LevelM`,
+      rise: `${at.root}/profile/${end}RiseM`,
     }),
     compute: ({ proposed, rise }) => proposed + rise,
   });
 
-/** The road line of an option and the fill it adds. */
+const crestPath = 'options/:option/profile/crestRadiusM';
+const crestLabel = 'radius of the crest between the abutments';
+
+const crest: readonly Descriptor[] = [
+  described({
+    path: crestPath,
+    when: (at) => riseOf(at, 'start') + riseOf(at, 'end') === 0 && oneLine(at) && touchOn(at) !== null,
+    label: crestLabel,
+    unit: 'm',
+    method: 'flattest that clears',
+    formula:
+      'a b / (2 x height that the straight road lacks at the place that decides), a and b from the ends',
+    inputs: (at) => ({ ...touchInputs(at), least: 'site/roadCurves/crestRadiusM' }),
+    compute: ({ least, ...v }) => {
+      const { shortM, a, b } = shortage(v);
+      return Math.max(least, (a * b) / (2 * shortM));
+    },
+  }),
+  described({
+    path: crestPath,
+    label: crestLabel,
+    unit: 'm',
+    method: 'flattest that clears',
+    formula: (at) =>
+      at.option.profile.crestRadiusM === null
+        ? 'the road runs straight'
+        : 'as flat as the clearances allow between ends at these levels, no sharper than the least radius',
+    inputs: searched,
+  }),
+];
+
+const pieceFields = {
+  fromM: ['start', 'm'],
+  toM: ['end', 'm'],
+  levelM: ['level at the start', 'm'],
+  gradient: ['gradient at the start', ''],
+  curvature1PerM: ['change of gradient per metre', '1/m'],
+} as const;
+
+/** The road piece by piece: each follows from the levels at the abutments, the crest between them and the least curves. */
+const pieces = (Object.keys(pieceFields) as (keyof typeof pieceFields)[]).map((field) =>
+  described({
+    path: `options/:option/profile/pieces/:piece/${field}`,
+    label: (at) => `${pieceFields[field][0]} of stretch ${at.index('piece') + 1} of the road`,
+    unit: pieceFields[field][1],
+    method: 'vertical alignment',
+    formula: (at) => {
+      const { startM, endM } = at.appraisal.site;
+      const piece = at.option.profile.pieces[at.index('piece')]!;
+      return piece.fromM >= startM && piece.toM <= endM
+        ? 'between the abutments: straight, or over the crest that their levels leave room for'
+        : 'approach: tangent at the abutment, over a crest to the limiting gradient, through a sag to the ground or the tie-in';
+    },
+    inputs: (at) => ({
+      levels: ends.map((end) => `${at.root}/profile/${end}LevelM`),
+      crest: at.option.profile.crestRadiusM === null ? [] : [`${at.root}/profile/crestRadiusM`],
+      least: ['site/roadCurves/crestRadiusM', 'site/roadCurves/sagRadiusM'],
+      steepest: 'site/road/maxGradient',
+    }),
+  }),
+);
+
+/** Stretches of the road between the abutments. */
+const between = (at: At, field: string): string[] => {
+  const { startM, endM } = at.appraisal.site;
+  return at.option.profile.pieces.flatMap(({ fromM, toM }, i) =>
+    fromM >= startM && toM <= endM ? [`${at.root}/profile/pieces/${i}/${field}`] : [],
+  );
+};
+
+const approachFields = {
+  lengthM: ['length', 'm', 'from the abutment to where the road meets the ground, or to its tie-in'],
+  fillM3: ['fill', 'm3', 'W h + s h^2 across with side slopes, W h between walls, summed along the approach'],
+  wallM2: [
+    'face of the retaining walls',
+    'm2',
+    '2 h summed along an approach between walls; 0 with side slopes',
+  ],
+} as const;
+
+const approaches = (Object.keys(approachFields) as (keyof typeof approachFields)[]).map((field) =>
+  described({
+    path: `options/:option/profile/approaches/:end/${field}`,
+    label: (at) => `${approachFields[field][0]} of the ${at.name('end')} approach`,
+    unit: approachFields[field][1],
+    method: 'integration over the ground',
+    formula: (at) => {
+      const as = fixed(at, at.name('end') as End)
+        ? ', along the road as proposed, which cannot move here'
+        : '';
+      return `${approachFields[field][2]}${as}; ground beyond the survey taken as level`;
+    },
+    inputs: (at) => {
+      const end = at.name('end') as End;
+      const { groundZ } = at.appraisal.site;
+      return {
+        level: fixed(at, end) ? `site/road/${end}LevelM` : `${at.root}/profile/${end}LevelM`,
+        ground: `${at.root}/supports/${end === 'start' ? 0 : at.option.supports.length - 1}/groundLevelM`,
+        beyond: `site/groundZ/${end === 'start' ? 0 : groundZ.length - 1}`,
+        width: 'site/deck/widthM',
+        slope: 'site/road/fillSideSlope',
+        gradient: 'site/road/maxGradient',
+        curves: ['site/roadCurves/crestRadiusM', 'site/roadCurves/sagRadiusM'],
+        sides: 'brief/road/approachSides',
+        tieIn: `brief/road/${end}TieIn`,
+        reach: `brief/road/${end}ApproachM`,
+      } as const;
+    },
+  }),
+);
+
+/** The road of an option, its approaches and what they take. */
 export const roadFigures: readonly Descriptor[] = [
-  end('start'),
-  end('end'),
+  level('start'),
+  level('end'),
   ...rises('start'),
   ...rises('end'),
   described({
     path: 'options/:option/profile/gradient',
-    label: 'gradient of the road',
+    label: 'gradient of the road from abutment to abutment',
     unit: '',
     method: 'ratio',
     formula: '(level at the end - level at the start) / length',
@@ -182,30 +279,38 @@ export const roadFigures: readonly Descriptor[] = [
     compute: ({ end, start, length }) => (end - start) / length,
   }),
   described({
-    path: 'options/:option/profile/addedFillM3',
-    label: 'fill added by lifting the road',
-    unit: 'm3',
-    method: 'closed form',
-    formula: 'both ends: (W (h1^2 - h0^2) / 2 + s (h1^3 - h0^3) / 3) / g, h0 and h1 heights before and after',
+    path: 'options/:option/profile/steepestGradient',
+    label: 'steepest gradient between the abutments',
+    unit: '',
+    method: 'greatest',
+    formula: 'gradients at both ends of each stretch, either way',
     inputs: (at) => ({
-      width: 'site/deck/widthM',
-      slope: 'site/road/fillSideSlope',
-      gradient: 'site/road/maxGradient',
-      proposed: ['site/road/startLevelM', 'site/road/endLevelM'],
-      ground: [
-        `${at.root}/supports/0/groundLevelM`,
-        `${at.root}/supports/${at.option.supports.length - 1}/groundLevelM`,
-      ],
-      rise: [`${at.root}/profile/startRiseM`, `${at.root}/profile/endRiseM`],
+      gradients: between(at, 'gradient'),
+      bends: between(at, 'curvature1PerM'),
+      from: between(at, 'fromM'),
+      to: between(at, 'toM'),
     }),
-    compute: (v) =>
-      [0, 1].reduce((total, i) => {
-        const before = v.proposed[i]! - v.ground[i]!;
-        const h0 = Math.max(0, before);
-        const h1 = Math.max(0, before + v.rise[i]!);
-        return (
-          total + ((v.width * (h1 ** 2 - h0 ** 2)) / 2 + (v.slope * (h1 ** 3 - h0 ** 3)) / 3) / v.gradient
-        );
-      }, 0),
+    compute: ({ gradients, bends, from, to }) =>
+      Math.max(
+        ...gradients.flatMap((gradient, i) => [
+          Math.abs(gradient),
+          Math.abs(gradient + bends[i]! * (to[i]! - from[i]!)),
+        ]),
+      ),
+  }),
+  ...crest,
+  ...pieces,
+  ...approaches,
+  described({
+    path: 'options/:option/profile/addedFillM3',
+    label: 'fill of the approaches over that of the proposed road',
+    unit: 'm3',
+    method: 'difference',
+    formula: 'start and end: fill of the approach - fill with the road as proposed',
+    inputs: (at) => ({
+      fill: ends.map((end) => `${at.root}/profile/approaches/${end}/fillM3`),
+      proposed: ends.map((end) => `site/proposedFill/${end}`),
+    }),
+    compute: ({ fill, proposed }) => fill[0]! - proposed[0]! + (fill[1]! - proposed[1]!),
   }),
 ];

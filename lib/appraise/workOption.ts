@@ -71,7 +71,7 @@ function taskOf(
   const { site } = bench;
   const module = formModule(unit.form);
   const clear = (x: number): number =>
-    Math.max(0, roadLevelAt(site, profile, x) - constructionDepth(site.deck, depthM) - groundAt(site, x));
+    Math.max(0, roadLevelAt(profile, x) - constructionDepth(site.deck, depthM) - groundAt(site, x));
   return {
     form: unit.form,
     method: unit.role === 'main' ? option.method : module.methods[0],

@@ -1,6 +1,7 @@
 import { factFigures } from '../appraise/factFigures.ts';
 import { headroomFigures } from '../appraise/headroomFigures.ts';
 import { placeFigures } from '../appraise/placeFigures.ts';
+import { hundredMmFigures } from '../appraise/hundredMmFigures.ts';
 import { roadFigures } from '../appraise/roadFigures.ts';
 import { rulingFigures } from '../appraise/rulingFigures.ts';
 import { arrangementFigures } from '../arrange/figures.ts';
@@ -63,6 +64,7 @@ export const manual: readonly Descriptor[] = [
   ...floorPractice,
   ...designFigures,
   ...roadFigures,
+  ...hundredMmFigures,
   ...headroomFigures,
   ...placeFigures,
   ...riverFigures,

@@ -19,6 +19,7 @@ import truss from '../../data/forms/truss.json';
 import ground from '../../data/ground.json';
 import materials from '../../data/materials.json';
 import programme from '../../data/programme.json';
+import road from '../../data/road.json';
 import drivers from '../../data/rates/drivers.json';
 import hl93 from '../../data/standards/hl93.json';
 import lm1 from '../../data/standards/lm1.json';
@@ -31,6 +32,7 @@ import { fieldWords } from './fieldWords.ts';
 const files: Readonly<Record<string, unknown>> = {
   substructure,
   river,
+  road,
   programme,
   drivers,
   ground,

@@ -153,6 +153,8 @@ export interface AppraisedOption extends WorkedOption {
   readonly headroom: { readonly spareM: number; readonly reason: string; readonly chainageM: number } | null;
   /** Every water whose flood reaches the crossing; absent on options made before rivers were looked at. */
   readonly rivers?: readonly RiverCrossed[];
+  /** What 100 mm more of construction depth does to the approaches, at mean rates; null where no road clears with it. */
+  readonly hundredMm: { readonly fillM3: number; readonly wallM2: number; readonly amount: number } | null;
   readonly deckAreaM2: number;
   readonly cost: Spread;
   readonly quartiles: readonly [q1: number, q3: number];

@@ -13,6 +13,7 @@ export interface Site {
   readonly waters: readonly WaterBody[];
   readonly groundStretches: readonly GroundStretch[];
   readonly road: Road;
+  readonly roadCurves: RoadCurves;
   readonly deck: DeckSpec;
   readonly standard: StandardId;
   /** Infinity on a straight; null when unknown. */
@@ -82,15 +83,49 @@ export interface DeckSpec {
   readonly superimposedKNm: number;
 }
 
-/** Finished road level along the crossing for one construction depth. */
+/** Least radii of the road's vertical curves, m; 0 lets gradients meet at an angle. */
+export interface RoadCurves {
+  readonly crestRadiusM: number;
+  readonly sagRadiusM: number;
+}
+
+/** A stretch of the road: level = levelM + gradient t + curvature1PerM t^2 / 2 at t = chainage - fromM. */
+export interface RoadPiece {
+  readonly fromM: number;
+  readonly toM: number;
+  /** Level at `fromM`, m. */
+  readonly levelM: number;
+  /** Gradient at `fromM`, rising with the chainage. */
+  readonly gradient: number;
+  /** Change of gradient per metre: 0 on a straight grade, negative on a crest, positive in a sag. */
+  readonly curvature1PerM: number;
+}
+
+/** What an approach takes between its abutment and the place where it meets the ground. */
+export interface Approach {
+  readonly lengthM: number;
+  readonly fillM3: number;
+  /** Face of its retaining walls, both sides together, m2; 0 with side slopes. */
+  readonly wallM2: number;
+}
+
+/** Finished road level along the crossing and its approaches for one construction depth. */
 export interface RoadProfile {
-  /** Level at both abutments, m; the road runs straight between them. */
+  /** Level at both abutments, m. */
   readonly startLevelM: number;
   readonly endLevelM: number;
   /** Rise above the proposed levels at each end, m. */
   readonly startRiseM: number;
   readonly endRiseM: number;
-  /** Fill added behind each abutment by that rise, m3. */
+  /** Fill of both approaches over that of the road as proposed, m3; a little less where a crest on the bridge spares one. */
   readonly addedFillM3: number;
+  /** From abutment to abutment. */
   readonly gradient: number;
+  /** Steepest gradient between the abutments, either way. */
+  readonly steepestGradient: number;
+  /** Radius of the crest between the abutments, m; null where the road runs straight. */
+  readonly crestRadiusM: number | null;
+  /** In order of chainage without gaps: the approach of each free end, and the road between the abutments. */
+  readonly pieces: readonly RoadPiece[];
+  readonly approaches: { readonly start: Approach; readonly end: Approach };
 }

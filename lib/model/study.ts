@@ -71,7 +71,29 @@ export interface Road {
   readonly maxGradient: number;
   /** Side slope of approach fill, horizontal to vertical. */
   readonly fillSideSlope: number;
+  /** Speed the vertical curves are laid out for, km/h. */
+  readonly designSpeedKmh: number | Unknown;
+  /** Least radius of a crest and of a sag, m; 0 lets gradients meet at an angle; unknown = by the design speed. */
+  readonly crestRadiusM: number | Unknown;
+  readonly sagRadiusM: number | Unknown;
+  /**
+   * How a free end is joined to the road behind it: `moves` = it falls at the steepest gradient and meets the ground where
+   * it will; `fixed` = one gradient from a place that stays.
+   */
+  readonly startTieIn: TieIn;
+  readonly endTieIn: TieIn;
+  /** Length of the approach behind each abutment, m: where a fixed tie-in lies, or how far one that moves may reach. */
+  readonly startApproachM: number | Unknown;
+  readonly endApproachM: number | Unknown;
+  /** Whether the fill of the approaches runs out in side slopes or stands between retaining walls. */
+  readonly approachSides: ApproachSides;
 }
+
+export const tieIns = ['moves', 'fixed'] as const;
+export type TieIn = (typeof tieIns)[number];
+
+export const approachSidesKinds = ['slopes', 'walls'] as const;
+export type ApproachSides = (typeof approachSidesKinds)[number];
 
 export const stripKinds = ['lane', 'shoulder', 'verge', 'footway', 'barrier', 'parapet'] as const;
 export type StripKind = (typeof stripKinds)[number];

@@ -1,4 +1,6 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
+import { approachEnds, type RoadEnd } from './approachEnd.ts';
+import { curveRow } from './roadCurves.ts';
 
 /** A figure of the site that is one of the brief, read on. */
 const copied = (path: string, from: (at: At) => string, label: string, unit = ''): Descriptor =>
@@ -70,6 +72,37 @@ function openingEnds(at: At, end: 'fromM' | 'toM'): string[] {
 
 const limitName = (at: At): string => at.appraisal.site.soffitLimits[at.index('i')]!.reason;
 const zoneName = (at: At): string => at.appraisal.site.zones[at.index('i')]!.name;
+
+/** Least radius of a vertical curve: as the brief gives it, or by the design speed. */
+const curve = (kind: 'crest' | 'sag'): Descriptor[] => {
+  const path = `site/roadCurves/${kind}RadiusM`;
+  const label = `least radius of a ${kind}`;
+  return [
+    {
+      ...copied(path, () => `brief/road/${kind}RadiusM`, label, 'm'),
+      when: (at) => at.study.brief.road[`${kind}RadiusM`] !== 'unknown',
+    },
+    described({
+      path,
+      label,
+      unit: 'm',
+      method: 'by the design speed',
+      formula:
+        'R = 100 K: K metres of curve for each per cent of change in gradient, at the speed or the next above it',
+      inputs: (at) => {
+        const { brief } = at.study;
+        const { designSpeedKmh } = brief.road;
+        const row = curveRow(designSpeedKmh, brief.loading);
+        return {
+          K: `data/road/${brief.loading}/speeds/${row.id}/${kind}Curve`,
+          speed: designSpeedKmh === 'unknown' ? 'data/road/unknownSpeedKmh' : 'brief/road/designSpeedKmh',
+          asked: `brief/road/${kind}RadiusM`,
+        };
+      },
+      compute: ({ K }) => 100 * K,
+    }),
+  ];
+};
 
 /** The site as the later stages read it, figure by figure. */
 export const siteFigures: readonly Descriptor[] = [
@@ -180,6 +213,37 @@ export const siteFigures: readonly Descriptor[] = [
   copied('site/road/mayRiseM', () => 'brief/road/mayRiseM', 'rise allowed at a free end', 'm'),
   copied('site/road/maxGradient', () => 'brief/road/maxGradient', 'steepest gradient'),
   copied('site/road/fillSideSlope', () => 'brief/road/fillSideSlope', 'side slope of fill'),
+  copied('site/road/designSpeedKmh', () => 'brief/road/designSpeedKmh', 'design speed', 'km/h'),
+  ...(['start', 'end'] as const).map((end) =>
+    copied(
+      `site/road/${end}ApproachM`,
+      () => `brief/road/${end}ApproachM`,
+      `length of the ${end} approach`,
+      'm',
+    ),
+  ),
+  ...curve('crest'),
+  ...curve('sag'),
+  described({
+    path: 'site/proposedFill/:end',
+    label: (at) => `fill of the ${at.name('end')} approach with the road as proposed`,
+    unit: 'm3',
+    method: 'integration over the ground',
+    formula: 'W h + s h^2 across with side slopes, W h between walls, summed along the approach',
+    value: (at) => approachEnds(at.appraisal.site)[at.name('end') as RoadEnd].proposed.fillM3,
+    inputs: (at) => {
+      const end = at.name('end');
+      return {
+        levels: ['site/road/startLevelM', 'site/road/endLevelM'],
+        ground: `site/groundZ/${end === 'start' ? 0 : at.appraisal.site.groundZ.length - 1}`,
+        width: 'site/deck/widthM',
+        slope: 'site/road/fillSideSlope',
+        gradient: 'site/road/maxGradient',
+        curves: ['site/roadCurves/crestRadiusM', 'site/roadCurves/sagRadiusM'],
+        sides: 'brief/road/approachSides',
+      } as const;
+    },
+  }),
   described({
     path: 'site/planRadiusM',
     label: 'plan radius',

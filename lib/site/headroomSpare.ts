@@ -27,7 +27,7 @@ export function headroomSpare(
     if (!(from <= to)) continue;
     const bends = typeof depth === 'number' ? [] : depth.xM.filter((x) => x > from && x < to);
     for (const chainageM of [from, to, ...bends]) {
-      const spareM = roadLevelAt(site, profile, chainageM) - depthAt(depth, chainageM) - limit.levelM;
+      const spareM = roadLevelAt(profile, chainageM) - depthAt(depth, chainageM) - limit.levelM;
       if (least === null || spareM < least.spareM) least = { spareM, limit, chainageM };
     }
   }

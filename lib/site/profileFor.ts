@@ -1,8 +1,21 @@
 import type { RoadProfile, Site, SoffitLimit } from '../model/index.ts';
 import { addedFill } from './addedFill.ts';
-import { depthAt, type DepthAlong } from './depthAlong.ts';
+import {
+  approachEnds,
+  approachFrom,
+  approachPieces,
+  isFixed,
+  measured,
+  outwardFall,
+  proposedGradient,
+  type RoadEnd,
+} from './approachEnd.ts';
+import { crestLevelAt, crestPieces, type Crest } from './crest.ts';
+import type { DepthAlong } from './depthAlong.ts';
 import { groundAt } from './lookups.ts';
-import { lowestLine, type Demand, type Rises } from './lowestLine.ts';
+import { hasRoad, lowestEnds, type Layout } from './lowestEnds.ts';
+import { decidingNeeds, needsOf, type Need } from './needs.ts';
+import { pieceGradientAt } from './roadLevelAt.ts';
 
 /** Why no road line fits, and the smallest ways out. */
 export interface ProfileRefusal {
@@ -21,48 +34,59 @@ export type ProfileResult =
   | { readonly ok: true; readonly profile: RoadProfile }
   | { readonly ok: false; readonly refusal: ProfileRefusal };
 
-interface Clear {
-  readonly limit: SoffitLimit;
-  readonly chainageM: number;
-  /** Road level needed there, m. */
-  readonly levelM: number;
+/** What the road between the abutments is laid out by when free ends may rise by so much, m. */
+function layoutOf(site: Site, riseM: number): Layout {
+  const { road, startM, endM, roadCurves, deck } = site;
+  const { startLevelM, endLevelM, maxGradient } = road;
+  const most = (end: RoadEnd): number => road[`${end}LevelM`] + (isFixed(site, end) ? 0 : riseM);
+  const ends = approachEnds(site);
+  const bound = (end: RoadEnd): ((crest: Crest) => boolean) | undefined => {
+    const approach = ends[end];
+    if (isFixed(site, end) || (approach.tieInM === null && approach.reachM === Infinity)) return undefined;
+    return (crest) =>
+      approachFrom(
+        approach,
+        end === 'start' ? crest.levelM : crest.endLevelM,
+        outwardFall(end, end === 'start' ? crest.before : crest.after),
+      ).fits;
+  };
+  const startFits = bound('start');
+  const endFits = bound('end');
+  const slope = road.approachSides === 'walls' ? 0 : road.fillSideSlope;
+  const fill = (end: RoadEnd, levelM: number): number => {
+    const height = levelM - groundAt(site, end === 'start' ? startM : endM);
+    // Where no fill is moved the lower road is still the better one.
+    return addedFill(deck.widthM, 0, height, slope, maxGradient) + deck.widthM * levelM;
+  };
+  return {
+    startM,
+    endM,
+    leastStartM: startLevelM,
+    leastEndM: endLevelM,
+    mostStartM: most('start'),
+    mostEndM: most('end'),
+    radiusM: roadCurves.crestRadiusM,
+    // Less by a hair, so that rounding never leaves the road steeper.
+    gradient: maxGradient * (1 - 1e-12),
+    costOf: (start, end) => fill('start', start) + fill('end', end),
+    ...(startFits ? { startFits } : {}),
+    ...(endFits ? { endFits } : {}),
+  };
 }
 
-/** Road levels needed: at both ends of every limit and wherever the depth bends under it. */
-function needs(site: Site, depth: number | DepthAlong): Clear[] {
-  return site.soffitLimits.flatMap((limit) => {
-    const from = Math.max(limit.fromM, site.startM);
-    const to = Math.min(limit.toM, site.endM);
-    if (!(from <= to)) return [];
-    const bends = typeof depth === 'number' ? [] : depth.xM.filter((x) => x > from && x < to);
-    return [from, to, ...bends].map((chainageM) => ({
-      limit,
-      chainageM,
-      levelM: limit.levelM + depthAt(depth, chainageM),
-    }));
-  });
+/** Those needs that decide once every one is eased by so much, m. */
+function decidingWhen(site: Site, needs: readonly Need[], easedM: number): Need[] {
+  const eased = easedM === 0 ? needs : needs.map((need) => ({ ...need, levelM: need.levelM - easedM }));
+  return decidingNeeds(site, eased, site.road.startLevelM, site.road.endLevelM);
 }
 
-/** Every demand on the two rises, with clearances eased by `easedM` and free ends allowed to rise by `riseM`. */
-function demandsOn(site: Site, clears: readonly Clear[], riseM: number, easedM: number): Demand[] {
-  const { road, lengthM, startM } = site;
-  const free = (end: 'start' | 'end'): number =>
-    road.fixedEnd === end || road.fixedEnd === 'both' ? 0 : riseM;
-  const fall = road.endLevelM - road.startLevelM;
-  const most = road.maxGradient * lengthM;
-  return [
-    { atStart: 1, atEnd: 0, least: 0 },
-    { atStart: 0, atEnd: 1, least: 0 },
-    { atStart: -1, atEnd: 0, least: -free('start') },
-    { atStart: 0, atEnd: -1, least: -free('end') },
-    { atStart: 1, atEnd: -1, least: fall - most },
-    { atStart: -1, atEnd: 1, least: -fall - most },
-    ...clears.map(({ chainageM, levelM }) => {
-      const share = (chainageM - startM) / lengthM;
-      return { atStart: 1 - share, atEnd: share, least: levelM - easedM - road.startLevelM - share * fall };
-    }),
-  ];
-}
+/** The lowest road between the abutments when free ends may rise by so much and every need is eased by so much, m. */
+const crestFor = (site: Site, needs: readonly Need[], riseM: number, easedM: number): Crest | null =>
+  lowestEnds(layoutOf(site, riseM), decidingWhen(site, needs, easedM));
+
+/** Whether there is one. */
+const fitsWith = (site: Site, needs: readonly Need[], riseM: number, easedM: number): boolean =>
+  hasRoad(layoutOf(site, riseM), decidingWhen(site, needs, easedM));
 
 /** Smallest value in (0, most] for which `fits` holds, to 0.1 mm; null when even the largest does not. */
 function smallest(most: number, fits: (value: number) => boolean): number | null {
@@ -78,84 +102,105 @@ function smallest(most: number, fits: (value: number) => boolean): number | null
 }
 
 function gradientRefusal(site: Site): ProfileRefusal {
-  const { road, lengthM } = site;
-  const gradient = Math.abs(road.endLevelM - road.startLevelM) / lengthM;
-  const riseNeededM = smallest(
-    gradient * lengthM,
-    (rise) => lowestLine(demandsOn(site, [], rise, 0)) !== null,
-  );
+  const gradient = Math.abs(proposedGradient(site));
   return {
     kind: 'gradient',
     limit: null,
     chainageM: null,
-    missedBy: gradient - road.maxGradient,
-    riseNeededM,
+    missedBy: gradient - site.road.maxGradient,
+    riseNeededM: smallest(gradient * site.lengthM, (rise) => fitsWith(site, [], rise, 0)),
   };
 }
 
-function refusal(site: Site, clears: readonly Clear[]): ProfileRefusal {
+function refusal(site: Site, needs: readonly Need[]): ProfileRefusal {
   const rise = site.road.mayRiseM;
-  if (lowestLine(demandsOn(site, [], rise, 0)) === null) return gradientRefusal(site);
-  const height = Math.max(
-    ...clears.map((clear) => clear.levelM - Math.min(site.road.startLevelM, site.road.endLevelM)),
-  );
-  const missedBy = smallest(
-    height + 1,
-    (eased) => lowestLine(demandsOn(site, clears, rise, eased)) !== null,
-  )!;
-  const line = lowestLine(demandsOn(site, clears, rise, missedBy))!;
-  const spare = (clear: Clear): number => levelAt(site, line, clear.chainageM) - clear.levelM;
-  const tightest = clears.reduce((worst, clear) => (spare(clear) < spare(worst) ? clear : worst));
-  const riseNeededM = smallest(
-    rise + 10 * (height + 1),
-    (r) => lowestLine(demandsOn(site, clears, r, 0)) !== null,
-  );
-  return { kind: 'clearance', limit: tightest.limit, chainageM: tightest.chainageM, missedBy, riseNeededM };
+  if (!fitsWith(site, [], rise, 0)) return gradientRefusal(site);
+  const lowest = Math.min(site.road.startLevelM, site.road.endLevelM);
+  const height = Math.max(...needs.map(({ levelM }) => levelM - lowest));
+  const missedBy = smallest(height + 1, (eased) => fitsWith(site, needs, rise, eased))!;
+  const crest = crestFor(site, needs, rise, missedBy)!;
+  const spare = (need: Need): number => crestLevelAt(crest, need.chainageM) - need.levelM;
+  const tightest = needs.reduce((worst, need) => (spare(need) < spare(worst) ? need : worst));
+  return {
+    kind: 'clearance',
+    limit: tightest.limit,
+    chainageM: tightest.chainageM,
+    missedBy,
+    riseNeededM: smallest(rise + 10 * (height + 1), (r) => fitsWith(site, needs, r, 0)),
+  };
 }
 
-function levelAt(site: Site, rises: Rises, chainageM: number): number {
-  const { road, startM, lengthM } = site;
-  const share = (chainageM - startM) / lengthM;
-  return (1 - share) * (road.startLevelM + rises.start) + share * (road.endLevelM + rises.end);
+/** The road on a crest with the approaches that belong to it. */
+function profileOn(site: Site, crest: Crest): RoadProfile {
+  const { road, lengthM } = site;
+  const ends = approachEnds(site);
+  const level = { start: crest.levelM, end: crest.endLevelM };
+  const side = (end: RoadEnd) => {
+    // A road that cannot move stays as it is behind its abutment, whatever the bridge does.
+    if (isFixed(site, end)) return { pieces: [], approach: ends[end].proposed };
+    const gradient = end === 'start' ? crest.before : crest.after;
+    const line = approachFrom(ends[end], level[end], outwardFall(end, gradient));
+    return { pieces: approachPieces(site, end, line), approach: measured(site, ends[end], line) };
+  };
+  const start = side('start');
+  const end = side('end');
+  const middle = crestPieces(crest);
+  const approaches = { start: start.approach, end: end.approach };
+  return {
+    startLevelM: level.start,
+    endLevelM: level.end,
+    startRiseM: level.start - road.startLevelM,
+    endRiseM: level.end - road.endLevelM,
+    addedFillM3:
+      approaches.start.fillM3 -
+      ends.start.proposed.fillM3 +
+      (approaches.end.fillM3 - ends.end.proposed.fillM3),
+    gradient: (level.end - level.start) / lengthM,
+    steepestGradient: Math.max(
+      ...middle.flatMap((piece) => [piece.gradient, pieceGradientAt(piece, piece.toM)].map(Math.abs)),
+    ),
+    crestRadiusM: Number.isFinite(crest.radiusM) ? crest.radiusM : null,
+    pieces: [...start.pieces, ...middle, ...end.pieces],
+    approaches,
+  };
 }
 
-function fillAt(site: Site, chainageM: number, proposedM: number, riseM: number): number {
-  const { road, deck } = site;
-  const height = proposedM - groundAt(site, chainageM);
-  return addedFill(deck.widthM, height, height + riseM, road.fillSideSlope, road.maxGradient);
+/** The road as proposed: straight between its levels, whatever stands in its way. */
+export function proposedProfile(site: Site): RoadProfile {
+  const gradient = proposedGradient(site);
+  return profileOn(site, {
+    startM: site.startM,
+    endM: site.endM,
+    levelM: site.road.startLevelM,
+    endLevelM: site.road.endLevelM,
+    fromM: site.startM,
+    toM: site.endM,
+    before: gradient,
+    after: gradient,
+    radiusM: Infinity,
+  });
 }
 
 /**
- * The lowest straight road line between the abutments whose soffit clears every limit.
+ * The lowest road whose soffit clears every limit, for a construction depth, m > 0 (soffit to road surface), constant or
+ * along the crossing.
  *
- * `depth` is the construction depth, m > 0 (soffit to road surface), constant or along the crossing. A fixed end is a
- * pivot; a free end may rise by `road.mayRiseM` and never falls below its proposed level; the gradient stays within
- * `road.maxGradient`. Fill behind each abutment is added by `addedFill`, the formation as wide as the deck. When no
- * line fits, the refusal names the limit, by how much it is missed (the smallest relaxation of headroom or depth) and
- * the rise that would do. Throws RangeError on a depth that is not a positive number.
+ * Between the abutments it runs straight or over one crest and nowhere sags; its ends stay at their proposed levels where
+ * the sharpest crest allowed is enough, and else rise as far as they must, shared so that the fill at the limiting
+ * gradient over level ground is least. Between such ends the crest is as flat as the limits allow. A fixed end keeps its
+ * level; a free one may rise by `road.mayRiseM`, never falls below its proposed level and takes its approach along:
+ * tangent at the abutment, over a crest to the limiting gradient and through a sag to the ground, or at one gradient to a
+ * tie-in that stays. Gradients stay within `road.maxGradient` and curves within `roadCurves` everywhere.
+ *
+ * When no line fits, the refusal names the limit, by how much it is missed (the smallest relaxation of headroom or depth)
+ * and the rise that would do. Throws RangeError on a depth that is not a positive number.
  */
 export function profileFor(site: Site, depth: number | DepthAlong): ProfileResult {
   const depths = typeof depth === 'number' ? [depth] : depth.depthM;
   if (!depths.every((d) => d > 0)) throw new RangeError('construction depth: expected more than 0 m');
-  const clears = needs(site, depth);
-  const rises = lowestLine(demandsOn(site, clears, site.road.mayRiseM, 0));
-  if (rises === null) return { ok: false, refusal: refusal(site, clears) };
-  const { road } = site;
-  const startRiseM = Math.max(rises.start, 0);
-  const endRiseM = Math.max(rises.end, 0);
-  const startLevelM = road.startLevelM + startRiseM;
-  const endLevelM = road.endLevelM + endRiseM;
-  return {
-    ok: true,
-    profile: {
-      startLevelM,
-      endLevelM,
-      startRiseM,
-      endRiseM,
-      addedFillM3:
-        fillAt(site, site.startM, road.startLevelM, startRiseM) +
-        fillAt(site, site.endM, road.endLevelM, endRiseM),
-      gradient: (endLevelM - startLevelM) / site.lengthM,
-    },
-  };
+  const needs = needsOf(site, depth);
+  const crest = crestFor(site, needs, site.road.mayRiseM, 0);
+  return crest === null
+    ? { ok: false, refusal: refusal(site, needs) }
+    : { ok: true, profile: profileOn(site, crest) };
 }

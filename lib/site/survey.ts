@@ -1,5 +1,6 @@
 import type { Brief, Obstacle, Site, SoffitLimit, Water, WaterBody, Zone } from '../model/index.ts';
 import { deckSpec } from './deckSpec.ts';
+import { roadCurves } from './roadCurves.ts';
 
 function zoneOf(obstacle: Obstacle): Zone[] {
   if (obstacle.supports === 'none') return [];
@@ -103,6 +104,7 @@ export function survey(brief: Brief): Site {
     waters: brief.waters.map(bodyOf),
     groundStretches: brief.groundStretches,
     road: brief.road,
+    roadCurves: roadCurves(brief.road, brief.loading),
     deck: deckSpec(brief.deck, brief.surfacingM, brief.loading),
     standard: brief.loading,
     planRadiusM: radius === 'unknown' ? null : radius === 'straight' ? Infinity : radius,

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import {
+  approachSidesKinds,
   formIds,
   groundClassIds,
   methodIds,
@@ -7,6 +8,7 @@ import {
   siteClasses,
   standardIds,
   stripKinds,
+  tieIns,
   type FormId,
 } from '../model/index.ts';
 import { fillGround } from './fillGround.ts';
@@ -52,6 +54,14 @@ const road = z.strictObject({
   mayRiseM: z.number().min(0).max(200).default(0),
   maxGradient: z.number().positive().max(0.25).default(0.06),
   fillSideSlope: z.number().min(0).max(10).default(2),
+  designSpeedKmh: orUnknown(z.number().min(10).max(200)).default('unknown'),
+  crestRadiusM: orUnknown(z.number().min(0).max(1e6)).default('unknown'),
+  sagRadiusM: orUnknown(z.number().min(0).max(1e6)).default('unknown'),
+  startTieIn: z.enum(tieIns).default('moves'),
+  endTieIn: z.enum(tieIns).default('moves'),
+  startApproachM: orUnknown(z.number().positive().max(5000)).default('unknown'),
+  endApproachM: orUnknown(z.number().positive().max(5000)).default('unknown'),
+  approachSides: z.enum(approachSidesKinds).default('slopes'),
 });
 
 const strip = z

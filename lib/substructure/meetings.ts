@@ -35,7 +35,7 @@ export function fixedIn(at: At, unit: number): number {
   const { supportsM } = at.option.units[unit]!;
   return fixedSupport(
     supportsM,
-    supportsM.map((x) => roadLevelAt(site, at.option.profile, x) - groundAt(site, x)),
+    supportsM.map((x) => roadLevelAt(at.option.profile, x) - groundAt(site, x)),
     supportsM.map((x) => waterDepthAt(site, x)),
   );
 }

@@ -45,7 +45,7 @@ export function standSupports(
         `unit ${k + 1}: expected a reaction at each of ${x.length} supports, received ${design.reactions.length}`,
       );
     }
-    const height = x.map((c) => roadLevelAt(site, profile, c) - groundAt(site, c));
+    const height = x.map((c) => roadLevelAt(profile, c) - groundAt(site, c));
     const water = x.map((c) => waterDepthAt(site, c));
     articulate(site, unit, design, height, water).forEach((hold, at) => {
       const list = meetings.get(x[at]!) ?? [];
@@ -79,7 +79,7 @@ function askAt(
   end: boolean,
   meetings: readonly Meeting[],
 ): SupportAsk {
-  const roadLevelM = roadLevelAt(site, profile, chainageM);
+  const roadLevelM = roadLevelAt(profile, chainageM);
   const deepest = Math.max(...meetings.map(({ design, at }) => depthOver(design, at)));
   const reaction = (key: 'permanentKN' | 'trafficMaxKN' | 'trafficMinKN'): number =>
     meetings.reduce((sum, { design, at }) => sum + design.reactions[at]![key], 0);

@@ -1,4 +1,5 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
+import { levelOnRoad, onRoad, onRoadFormula } from '../site/onRoad.ts';
 import { depthOver } from './articulate.ts';
 import { depthPathAt, unitsAt } from './meetings.ts';
 
@@ -100,16 +101,10 @@ export const supportFigures: readonly Descriptor[] = [
     path: support('roadM'),
     label: on('road level'),
     unit: 'm',
-    method: 'straight line',
-    formula: 'start level + (end level - start level) x distance / length',
-    inputs: (at) => ({
-      start: `${at.root}/profile/startLevelM`,
-      end: `${at.root}/profile/endLevelM`,
-      x: `${at.foot}/chainageM`,
-      from: 'site/startM',
-      length: 'site/lengthM',
-    }),
-    compute: ({ start, end, x, from, length }) => start + ((end - start) * (x - from)) / length,
+    method: 'vertical alignment',
+    formula: onRoadFormula,
+    inputs: (at) => onRoad(at, at.support.chainageM, `${at.foot}/chainageM`),
+    compute: (v) => levelOnRoad(v),
   }),
   described({
     path: support('topLevelM'),

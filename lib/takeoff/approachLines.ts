@@ -1,31 +1,43 @@
 import type { MeasuredLine, RoadProfile, Site } from '../model/index.ts';
-import { addedFill, groundAt } from '../site/index.ts';
+import { substructureData } from '../substructure/data.ts';
 
 /**
- * Fill of the two approaches, m3: from the ground to the proposed road at each abutment, run out at the limiting gradient
- * over level ground, and what the option's own road line adds to it.
+ * Fill of the two approaches, m3, and where it stands between retaining walls their concrete and bars: as measured along
+ * the road of the option over the ground. Walls are made like the wings of the abutments, by their face: a stem of mean
+ * thickness and a footing as wide as a share of the height.
  */
-export function approachLines(site: Site, profile: RoadProfile): MeasuredLine[] {
-  const { road, deck } = site;
-  const ends = [
-    { name: 'start', heightM: road.startLevelM - groundAt(site, site.startM) },
-    { name: 'end', heightM: road.endLevelM - groundAt(site, site.endM) },
-  ];
-  const lines: MeasuredLine[] = ends.map(({ name, heightM }) => ({
-    part: 'approaches',
-    item: 'fill',
-    quantity: addedFill(deck.widthM, 0, heightM, road.fillSideSlope, road.maxGradient),
-    what: `${name} approach`,
-    how: `${Math.max(0, heightM).toFixed(1)} m high at the abutment, sides ${road.fillSideSlope} to 1, run out at ${(100 * road.maxGradient).toFixed(1)} %`,
-  }));
-  if (profile.addedFillM3 > 0) {
-    lines.push({
+export function approachLines({ road }: Site, profile: RoadProfile): MeasuredLine[] {
+  return (['start', 'end'] as const).flatMap((end) => {
+    const { fillM3, wallM2, lengthM } = profile.approaches[end];
+    const long = `${lengthM.toFixed(0)} m from the abutment to the ground`;
+    const sides = road.approachSides === 'walls' ? 'between walls' : `sides ${road.fillSideSlope} to 1`;
+    const fill: MeasuredLine = {
       part: 'approaches',
       item: 'fill',
-      quantity: profile.addedFillM3,
-      what: 'raised approaches',
-      how: `road ${profile.startRiseM.toFixed(2)} m and ${profile.endRiseM.toFixed(2)} m above its proposed levels`,
-    });
-  }
-  return lines;
+      quantity: fillM3,
+      what: `${end} approach`,
+      how: `${long}, ${sides}`,
+    };
+    return wallM2 > 0 ? [fill, ...wallLines(`${end} approach`, wallM2)] : [fill];
+  });
+}
+
+/** Stems, footings and bars of retaining walls by their face, m2. */
+function wallLines(where: string, faceM2: number): MeasuredLine[] {
+  const { abutment, footing } = substructureData;
+  const stemM3 = faceM2 * abutment.wingM;
+  const footingM3 = faceM2 * abutment.wingFootingWidth * abutment.wingFootingM;
+  const line = (item: string, quantity: number, what: string, how: string): MeasuredLine => ({
+    part: 'approaches',
+    item,
+    quantity,
+    what: `${where} ${what}`,
+    how,
+  });
+  return [
+    line('abutment-concrete', stemM3, 'walls', `${faceM2.toFixed(0)} m2 of face`),
+    line('reinforcement', stemM3 * abutment.barsKgM3, 'walls', `${abutment.barsKgM3} kg/m3`),
+    line('footing-concrete', footingM3, 'wall footings', 'by height'),
+    line('reinforcement', footingM3 * footing.barsKgM3, 'wall footings', `${footing.barsKgM3} kg/m3`),
+  ];
 }

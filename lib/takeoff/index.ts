@@ -1,3 +1,4 @@
+export { approachLines } from './approachLines.ts';
 export { itemOf, items, type Item } from './items.ts';
 export { methodLines } from './methodLines.ts';
 export { measure } from './measure.ts';

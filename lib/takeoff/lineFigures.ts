@@ -62,27 +62,76 @@ function possession(at: At) {
   };
 }
 
-const approach = (end: 'start' | 'end'): Descriptor =>
-  described({
-    path,
-    when: crossing((what) => what === `${end} approach`),
-    label,
-    unit,
-    method: 'closed form',
-    formula:
-      '(W h^2 / 2 + s h^3 / 3) / g: h height of the road at the abutment, W width, s side slope, g limiting gradient',
-    inputs: (at) => ({
-      road: `site/road/${end}LevelM`,
-      ground: `${at.root}/supports/${end === 'start' ? 0 : at.option.supports.length - 1}/groundLevelM`,
-      width: 'site/deck/widthM',
-      slope: 'site/road/fillSideSlope',
-      gradient: 'site/road/maxGradient',
+type End = 'start' | 'end';
+
+/** Lines of one approach: its fill, and what its walls are made of, from their face. */
+const approach = (end: End): Descriptor[] => {
+  const of = (ending: string) => crossing((what) => what === `${end} approach${ending}`);
+  const face = (at: At) => ({ face: `${at.root}/profile/approaches/${end}/wallM2` }) as const;
+  const data = 'data/substructure';
+  const item = (name: string, ending: string) => (at: At) => of(ending)(at) && lineOf(at).item === name;
+  const concrete = (at: At, name: string): string => {
+    const { what } = lineOf(at);
+    const line = at.option.lines.findIndex((one) => one.item === name && one.what === what);
+    return `${at.root}/lines/${line}/quantity`;
+  };
+  return [
+    described({
+      path,
+      when: of(''),
+      label,
+      unit,
+      method: 'as measured',
+      formula: 'fill of the approach, integrated over the ground',
+      inputs: (at) => ({ fill: `${at.root}/profile/approaches/${end}/fillM3` }),
+      compute: ({ fill }) => fill,
     }),
-    compute: (v) => {
-      const h = Math.max(0, v.road - v.ground);
-      return ((v.width * h ** 2) / 2 + (v.slope * h ** 3) / 3) / v.gradient;
-    },
-  });
+    described({
+      path,
+      when: item('abutment-concrete', ' walls'),
+      label,
+      unit,
+      method: 'volume',
+      formula: 'face of the walls x mean thickness of their stems',
+      inputs: (at) => ({ ...face(at), thickness: `${data}/abutment/wingM` }),
+      compute: (v) => v.face * v.thickness,
+    }),
+    described({
+      path,
+      when: item('footing-concrete', ' wall footings'),
+      label,
+      unit,
+      method: 'volume',
+      formula: 'face of the walls x width of their footings by height x thickness',
+      inputs: (at) => ({
+        ...face(at),
+        share: `${data}/abutment/wingFootingWidth`,
+        thickness: `${data}/abutment/wingFootingM`,
+      }),
+      compute: (v) => v.face * v.share * v.thickness,
+    }),
+    described({
+      path,
+      when: item('reinforcement', ' walls'),
+      label,
+      unit,
+      method: 'product',
+      formula: 'concrete x bars per m3',
+      inputs: (at) => ({ concrete: concrete(at, 'abutment-concrete'), bars: `${data}/abutment/barsKgM3` }),
+      compute: ({ concrete: volume, bars }) => volume * bars,
+    }),
+    described({
+      path,
+      when: item('reinforcement', ' wall footings'),
+      label,
+      unit,
+      method: 'product',
+      formula: 'concrete x bars per m3',
+      inputs: (at) => ({ concrete: concrete(at, 'footing-concrete'), bars: `${data}/footing/barsKgM3` }),
+      compute: ({ concrete: volume, bars }) => volume * bars,
+    }),
+  ];
+};
 
 /** Lines of the take-off: where each was measured, and what the crossing itself asks for. */
 export const lineFigures: readonly Descriptor[] = [
@@ -131,18 +180,8 @@ export const lineFigures: readonly Descriptor[] = [
     inputs: () => ({ length: 'site/lengthM' }),
     compute: ({ length }) => 2 * length,
   }),
-  approach('start'),
-  approach('end'),
-  described({
-    path,
-    when: isItem('fill'),
-    label,
-    unit,
-    method: 'as sized',
-    formula: 'fill added by lifting the road',
-    inputs: (at) => ({ added: `${at.root}/profile/addedFillM3` }),
-    compute: ({ added }) => added,
-  }),
+  ...approach('start'),
+  ...approach('end'),
   described({
     path,
     when: isItem('rail-possession'),

@@ -39,13 +39,18 @@ const supportParts: ReadonlySet<BillPart> = new Set([
   'river-works',
 ]);
 
-/** Materials of the superstructure and of what carries it (pylons, piers, abutments, foundations), apart. */
+/**
+ * Materials of the superstructure and of what carries it (pylons, piers, abutments, foundations), apart. Walls of the
+ * approaches are neither.
+ */
 export function splitQuantities(lines: readonly MeasuredLine[]): {
   readonly superstructure: Quantities;
   readonly supports: Quantities;
 } {
   return {
-    superstructure: quantitiesOf(lines.filter((line) => !supportParts.has(line.part))),
+    superstructure: quantitiesOf(
+      lines.filter((line) => !supportParts.has(line.part) && line.part !== 'approaches'),
+    ),
     supports: quantitiesOf(lines.filter((line) => supportParts.has(line.part))),
   };
 }

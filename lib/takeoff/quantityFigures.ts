@@ -53,7 +53,7 @@ export const quantityFigures: readonly Descriptor[] = [
     formula: (at) =>
       linesOf(at, 'superstructure').whole.length === 0
         ? 'none is measured'
-        : 'lines of this material but those of pylons, piers, abutments, foundations and river works',
+        : 'lines of this material but those of pylons, piers, abutments, foundations, river works and approaches',
     inputs: (at) => ({ lines: linesOf(at, 'superstructure').whole }),
     compute: ({ lines }) => sum(lines),
   }),

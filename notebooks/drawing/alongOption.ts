@@ -1,5 +1,5 @@
 import type { AppraisedOption, Design, Site, Unit, WorkedOption } from '../model.ts';
-import { constructionDepth } from '../model.ts';
+import { constructionDepth, roadLevelAt } from '../model.ts';
 import { ofOption } from './asked.ts';
 
 /** Straight-line reading of a table at x; the end values hold outside it. Empty tables give NaN. */
@@ -22,15 +22,51 @@ export function readAt(xs: readonly number[], ys: readonly number[], x: number):
 export const groundLevel = (site: Site, chainageM: number): number =>
   readAt(site.groundX, site.groundZ, chainageM);
 
-/** Finished road level, m; the road runs straight between the abutments and on beyond them. */
-export function roadLevel(site: Site, option: WorkedOption, chainageM: number): number {
-  const { startLevelM, endLevelM } = option.profile;
-  return startLevelM + ((endLevelM - startLevelM) * (chainageM - site.startM)) / site.lengthM;
+/** Finished road level, m, on the bridge and on its approaches. */
+export const roadLevel = (option: WorkedOption, chainageM: number): number =>
+  roadLevelAt(option.profile, chainageM);
+
+/** How far a straight stroke may lie beside a curve of the road, px. */
+const besideCurvePx = 0.25;
+
+/**
+ * Chainages between two others, they excluded, at which a line that follows the road has to bend so that straight strokes
+ * stay on its curves: none where it runs straight. In the order of the two.
+ */
+export function roadBends(option: WorkedOption, fromM: number, toM: number, pxPerM: number): number[] {
+  const low = Math.min(fromM, toM);
+  const high = Math.max(fromM, toM);
+  const out: number[] = [];
+  for (const { fromM: start, toM: end, curvature1PerM } of option.profile.pieces) {
+    const left = Math.max(low, start);
+    const right = Math.min(high, end);
+    if (!(right > left)) continue;
+    if (start > low && start < high) out.push(start);
+    if (curvature1PerM !== 0) {
+      const step = Math.sqrt((8 * besideCurvePx) / (Math.abs(curvature1PerM) * pxPerM));
+      const parts = Math.ceil((right - left) / step);
+      for (let i = 1; i < parts; i += 1) out.push(left + ((right - left) * i) / parts);
+    }
+    if (end > low && end < high) out.push(end);
+  }
+  const rising = out.filter((at, index) => index === 0 || at - (out[index - 1] ?? 0) > 1e-6);
+  return toM < fromM ? rising.reverse() : rising;
+}
+
+/** Highest level of the road between the abutments, m. */
+export function roadTop(site: Site, option: WorkedOption): number {
+  let top = Math.max(option.profile.startLevelM, option.profile.endLevelM);
+  for (const { fromM, toM, gradient, curvature1PerM } of option.profile.pieces) {
+    if (toM <= site.startM || fromM >= site.endM || curvature1PerM === 0) continue;
+    const turns = fromM - gradient / curvature1PerM;
+    if (turns > fromM && turns < toM) top = Math.max(top, roadLevel(option, turns));
+  }
+  return top;
 }
 
 /** Top of the structural slab on the road line, m. */
 export const slabLevel = (site: Site, option: WorkedOption, chainageM: number): number =>
-  roadLevel(site, option, chainageM) - site.deck.surfacingM;
+  roadLevel(option, chainageM) - site.deck.surfacingM;
 
 /** Units with their designs and the chainage at which their x starts. */
 export interface PlacedUnit {
@@ -69,7 +105,7 @@ export const soffitLevel = (site: Site, option: WorkedOption, chainageM: number)
 
 /** Level of the lowest soffit at a chainage, m, at the edge to which the carriageway falls; NaN off the bridge. */
 export const lowestSoffit = (site: Site, option: WorkedOption, chainageM: number): number =>
-  roadLevel(site, option, chainageM) - constructionDepth(site.deck, depthAt(option, chainageM));
+  roadLevel(option, chainageM) - constructionDepth(site.deck, depthAt(option, chainageM));
 
 /** Highest of the lowest soffits allowed at a chainage, m; NaN where nothing limits it. */
 export function leastSoffit(site: Site, chainageM: number): number {
@@ -122,7 +158,7 @@ export const supportName = (index: number, count: number): string =>
 
 /** Highest and lowest level of anything an option draws above its foundations, m. */
 export function structureTop(site: Site, option: AppraisedOption): number {
-  let top = Math.max(option.profile.startLevelM, option.profile.endLevelM) + 1.1;
+  let top = roadTop(site, option) + 1.1;
   for (const { design, fromM } of placedUnits(option)) {
     for (const shape of design.elevation) {
       for (const [x, z] of shape.points) top = Math.max(top, slabLevel(site, option, fromM + x) + z);

@@ -3,6 +3,8 @@ import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
 import { roadLevel, soffitLevel, spanPaths, supportChainages } from './alongOption.ts';
 import { bubbleRadius, bubbles } from './bubbles.ts';
+import type { Asked } from './asked.ts';
+import { ofOption } from './asked.ts';
 import type { Envelope } from './clearances.ts';
 import { barredDimension, barredWash, clearances, envelopes } from './clearances.ts';
 import type { Room } from './crossingLetters.ts';
@@ -45,14 +47,32 @@ export interface CrossingInput {
   readonly prefix?: string;
 }
 
-/** Gradient figures at both ends of the road. */
+/** Gradient of a straight road at its left end; over a crest those at both abutments with its radius. */
 function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
-  const slope = (option.profile.endLevelM - option.profile.startLevelM) / site.lengthM;
-  const words = `${slope < -0.00005 ? '−' : '+'}${Math.abs(slope * 100).toFixed(1)} %`;
-  return label(frame.left, frame.y(roadLevel(site, option, frame.fromM) + 1.1) - 8, words, {
-    fill: colours.second,
-    halo: true,
-  });
+  const { pieces, crestRadiusM } = option.profile;
+  const onBridge = pieces.filter(({ fromM, toM }) => fromM >= site.startM && toM <= site.endM);
+  const say = (slope: number): string =>
+    `${slope < -0.00005 ? '−' : '+'}${Math.abs(slope * 100).toFixed(1)} %`;
+  const first = onBridge[0];
+  const last = onBridge[onBridge.length - 1];
+  const after = last ? last.gradient + last.curvature1PerM * (last.toM - last.fromM) : NaN;
+  const at = (right: boolean, words: string, figure?: Asked): Piece =>
+    label(
+      right ? frame.right : frame.left,
+      frame.y(roadLevel(option, right ? frame.toM : frame.fromM) + 1.1) - 8,
+      words,
+      { fill: colours.second, halo: true, anchor: right ? 'end' : 'start', figure },
+    );
+  if (crestRadiusM === null || first === undefined) return at(false, say(option.profile.gradient));
+  return g(
+    {},
+    at(
+      false,
+      `R ${fixed(Math.round(crestRadiusM / 10) * 10, 0)}, ${say(first.gradient)}`,
+      ofOption(option, 'profile/crestRadiusM'),
+    ),
+    at(true, say(after)),
+  );
 }
 
 /** The barred dimension between envelope and soffit where there is room for its figure, else under the bed. */

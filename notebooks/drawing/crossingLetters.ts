@@ -270,7 +270,7 @@ export function takeRoom(site: Site, option: AppraisedOption | null, frame: Fram
         {
           left: frame.x(fromM + (xM[i - 1] ?? 0)),
           right: frame.x(at),
-          top: frame.y(roadLevel(site, option, at) + 1.1),
+          top: frame.y(roadLevel(option, at) + 1.1),
           bottom: frame.y(slabLevel(site, option, at) - (depthM[i] ?? 0)),
         },
         2,

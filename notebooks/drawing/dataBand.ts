@@ -115,7 +115,7 @@ export function dataBand(
     rows.push(
       {
         name: 'road',
-        figure: (at) => show(roadLevel(site, option, at)),
+        figure: (at) => show(roadLevel(option, at)),
         asked: (at) => overOf(option, at, 'roadM'),
       },
       {

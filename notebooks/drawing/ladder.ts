@@ -77,7 +77,7 @@ interface Levels {
 
 function ladderLevels(site: Site, option: AppraisedOption, at: number, top: number): Levels {
   const ppm = pxPerMetre(100);
-  const road = roadLevel(site, option, at);
+  const road = roadLevel(option, at);
   const soffit = lowestSoffit(site, option, at);
   const least = leastSoffit(site, at);
   const depth = depthAt(option, at);

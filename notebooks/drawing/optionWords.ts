@@ -1,7 +1,7 @@
 import { length, level } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
 import type { AppraisedOption, FormId, Site } from '../model.ts';
-import { spansOf, structureTop } from './alongOption.ts';
+import { spansOf, roadTop, structureTop } from './alongOption.ts';
 
 /** Whether an option's main unit is deeper at its supports than at midspan. */
 const isHaunched = (option: AppraisedOption): boolean => option.depthM.support > option.depthM.midspan + 0.05;
@@ -28,7 +28,7 @@ export function optionNote(site: Site, option: AppraisedOption): string {
   const depth = isHaunched(option)
     ? `${level(midspan)} m at midspan, ${level(support)} m at piers`
     : `${level(midspan)} m deep`;
-  const above = structureTop(site, option) - Math.max(option.profile.startLevelM, option.profile.endLevelM);
+  const above = structureTop(site, option) - roadTop(site, option);
   const tall = above > 4 ? `, ${length(Math.round(above))} m above the road` : '';
   const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
   const moved =

@@ -1,5 +1,5 @@
 import type { AppraisedOption, Foundation, Site, Support } from '../model.ts';
-import { groundLevel, placedUnits, roadLevel, slabLevel, soffitLevel } from './alongOption.ts';
+import { groundLevel, placedUnits, roadBends, roadLevel, slabLevel, soffitLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
@@ -156,15 +156,14 @@ function pier(
 /** Broken level strokes 5.2 px apart between the road and the ground behind an abutment: fill as it is laid. */
 function fillStrokes(site: Site, option: AppraisedOption, frame: Frame, fromM: number, toM: number): string {
   const step = 1 / frame.pxPerM;
-  const top = Math.max(roadLevel(site, option, fromM), roadLevel(site, option, toM));
+  const top = Math.max(roadLevel(option, fromM), roadLevel(option, toM));
   const least = Math.min(...site.groundZ);
   let d = '';
   let row = 0;
   for (let level = top - 5.2 / frame.pxPerM; level > least; level -= 5.2 / frame.pxPerM, row += 1) {
     let open = NaN;
     for (let x = fromM + (row % 2) * 4 * step; x <= toM + step; x += step) {
-      const inside =
-        x <= toM && level < roadLevel(site, option, x) - 0.3 && level > groundLevel(site, x) + 0.2;
+      const inside = x <= toM && level < roadLevel(option, x) - 0.3 && level > groundLevel(site, x) + 0.2;
       if (inside && !(open <= x)) open = x;
       const long = 12 * step;
       if ((!inside || x - open >= long) && open <= x) {
@@ -199,7 +198,7 @@ function abutment(
   const thick = Math.max(support.shaft.lengthM, 0.8);
   const foot = foundation?.footing.topLevelM ?? support.groundLevelM;
   const seat = support.topLevelM;
-  const road = roadLevel(site, option, at);
+  const road = roadLevel(option, at);
   // Away from the bridge is `side`; the back wall stands behind the bearings, the wing reaches back to where its slope meets the road.
   const wallFoot = footOfWall(site, option, at);
   const front = at - side * (wallFoot === null ? Math.min(0.8, thick / 2) : thick / 2);
@@ -222,6 +221,7 @@ function abutment(
     side < 0
       ? Math.max(frame.fromM, site.groundX[0] ?? frame.fromM)
       : Math.min(frame.toM, site.groundX[site.groundX.length - 1] ?? frame.toM);
+  const edge = side < 0 ? frame.fromM : frame.toM;
   const from = Math.min(back, end);
   const to = Math.max(back, end);
   return g(
@@ -261,13 +261,12 @@ function abutment(
       el('path', { d: box(frame, at - 0.4, at + 0.4, soffit, seat), fill: colours.ink, stroke: 'none' }),
     // The road goes on behind the abutment, on the fill or on the ground.
     el('path', {
-      d: pathOf([
-        [frame.x(back), frame.y(road)],
-        [
-          side < 0 ? frame.left : frame.right,
-          frame.y(roadLevel(site, option, side < 0 ? frame.fromM : frame.toM)),
-        ],
-      ]),
+      d: pathOf(
+        [back, ...roadBends(option, back, edge, frame.pxPerM), edge].map((x) => [
+          frame.x(x),
+          frame.y(x === back ? road : roadLevel(option, x)),
+        ]),
+      ),
       'stroke-width': pens.medium,
     }),
   );

@@ -1,7 +1,7 @@
 import type { FormInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Shape, Site } from '../model.ts';
 import type { PlacedUnit } from './alongOption.ts';
-import { placedUnits, readAt, roadLevel, slabLevel } from './alongOption.ts';
+import { placedUnits, readAt, roadBends, roadLevel, slabLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
@@ -81,6 +81,23 @@ function unitPiece(
     frame.y(slabLevel(site, option, placed.fromM + x) + z),
   ];
   const { design } = placed;
+  const bent = (points: readonly XY[], closed: boolean): readonly XY[] =>
+    points.flatMap((point, i): readonly XY[] => {
+      const next = points[(i + 1) % points.length];
+      if (next === undefined || (!closed && i === points.length - 1)) return [point];
+      const [x, z] = point;
+      const bends = roadBends(option, placed.fromM + x, placed.fromM + next[0], frame.pxPerM);
+      return [
+        point,
+        ...bends.map((at): XY => {
+          const part = (at - placed.fromM - x) / (next[0] - x);
+          return [at - placed.fromM, z + part * (next[1] - z)];
+        }),
+      ];
+    });
+  /** What is built along the road bends with it; cables are straight whatever the road does. */
+  const laid = (shape: Shape, points: readonly XY[], closed: boolean): XY[] =>
+    (shape.material === 'stay' || shape.material === 'strand' ? points : bent(points, closed)).map(toSheet);
   // Members above or beside the deck stand behind it; the deck face comes last but for its faint lines.
   const order = (shape: Shape): number => (shape.faint === true ? 3 : shape.kind === 'line' ? 1 : 2);
   const shapes = [...design.elevation].sort((a, b) => order(a) - order(b));
@@ -89,8 +106,8 @@ function unitPiece(
     shapes.map((shape) =>
       shapePiece(
         shape,
-        shape.points.map(toSheet),
-        (shape.holes ?? []).map((hole) => hole.map(toSheet)),
+        laid(shape, shape.points, shape.kind === 'polygon'),
+        (shape.holes ?? []).map((hole) => laid(shape, hole, true)),
         placed,
         ink,
         frame,
@@ -109,7 +126,15 @@ function soffitLine(
   frame: Frame,
 ): Piece {
   const { xM, depthM } = placed.design.depthAlong;
-  const points = xM.map(
+  const places = xM.flatMap((x, i) => [
+    ...(i === 0
+      ? []
+      : roadBends(option, placed.fromM + (xM[i - 1] ?? x), placed.fromM + x, frame.pxPerM).map(
+          (at) => at - placed.fromM,
+        )),
+    x,
+  ]);
+  const points = places.map(
     (x) =>
       [
         frame.x(placed.fromM + x),
@@ -144,27 +169,29 @@ export function superstructure(
   const plain = style.plain === true;
   const from = site.startM;
   const to = site.endM;
-  const road = (x: number, rise = 0): XY => [frame.x(x), frame.y(roadLevel(site, option, x) + rise)];
+  const road = (x: number, rise = 0): XY => [frame.x(x), frame.y(roadLevel(option, x) + rise)];
+  const along = (fromM: number, toM: number, rise = 0): XY[] =>
+    [fromM, ...roadBends(option, fromM, toM, frame.pxPerM), toM].map((x) => road(x, rise));
   const over = Math.min(6, (frame.toM - to) / 2);
   const posts = style.postsM ?? 0;
   let postLines = '';
   if (posts > 0) {
     for (let x = from; x <= to + 1e-6; x += posts)
-      postLines += `M${num(frame.x(x))},${num(frame.y(roadLevel(site, option, x) + 1.1))}V${num(frame.y(roadLevel(site, option, x)))}`;
+      postLines += `M${num(frame.x(x))},${num(frame.y(roadLevel(option, x) + 1.1))}V${num(frame.y(roadLevel(option, x)))}`;
   }
   return g(
     { class: 'superstructure' },
     units.map((placed) => unitPiece(site, option, placed, ink, frame, plain)),
     !plain && units.map((placed) => soffitLine(site, option, placed, ink, frame)),
     el('path', {
-      d: pathOf([road(from), road(to)]),
+      d: pathOf(along(from, to)),
       fill: 'none',
       stroke: colours.ink,
       'stroke-width': pens.fine,
     }),
     !plain &&
       el('path', {
-        d: pathOf([road(from - over, 1.1), road(to + over, 1.1)]) + postLines,
+        d: pathOf(along(from - over, to + over, 1.1)) + postLines,
         fill: 'none',
         stroke: colours.second,
         'stroke-width': pens.fine,

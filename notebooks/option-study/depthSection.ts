@@ -6,6 +6,7 @@ import { fixed, level } from '../format.ts';
 import { h } from '../html.ts';
 import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { AppraisedOption } from '../model.ts';
+import { depthPrice, roadWords } from './roadWords.ts';
 import type { StudyCells } from './studyCells.ts';
 
 /** Section 4: what stands between the deciding obstacle and the road. */
@@ -20,7 +21,9 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
     const lifted =
       rise > 0.005
         ? ['the road rises ', workedFigure(ofOption(option, `profile/${end}RiseM`), level(rise)), ' m for it']
-        : 'the road stays where it is';
+        : option.profile.crestRadiusM === null
+          ? 'the road stays where it is'
+          : 'the road rises over it on a crest, its ends stay where they are';
     return [
       workedFigure(ofOption(option, 'depthM/midspan'), level(option.depthM.midspan)),
       ' m of structure leaves ',
@@ -34,7 +37,7 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
     page.cell({
       station: '4+010',
       title: 'Depth at the obstacle',
-      shows: { site, brief, reference },
+      shows: { site, brief, books, reference },
       body: (v) => {
         const option = v.reference;
         if (!option) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
@@ -59,11 +62,8 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
             ),
             ', where least is left.',
           ),
-          h(
-            'p',
-            {},
-            'A free end of the road that rises by Δ adds fill of about (W h + s h²)/g for each metre on its side.',
-          ),
+          h('p', {}, roadWords(v.reference)),
+          h('p', {}, depthPrice(v.reference, v.books.currency)),
         ],
     }),
     page.cell({

@@ -1,5 +1,5 @@
 import { beforeAll, describe, expect, it } from 'vitest';
-import { appraise, type Appraisal, type Study } from '../../lib/index.ts';
+import { appraise, roadLevelAt, type Appraisal, type Study } from '../../lib/index.ts';
 import { lowFerry, mirrored } from './studies.ts';
 
 /** One sizer for the file would hide nothing: sizing is pure. Each appraisal here starts afresh. */
@@ -108,7 +108,8 @@ describe('appraise', { timeout: 60_000 }, () => {
       if (fouled) expect(option.status).toBe('out');
     }
     const [a, b] = [cheapest(base, 'composite-i'), cheapest(other, 'composite-i')];
-    const lift = b.profile.startRiseM - a.profile.startRiseM;
+    const rail = 1272;
+    const lift = roadLevelAt(b.profile, rail) - roadLevelAt(a.profile, rail);
     const thinner = a.depthM.midspan - b.depthM.midspan;
     expect(lift + thinner).toBeGreaterThan(0.3);
   });

@@ -86,6 +86,7 @@ describe('crossing(input)', () => {
         ...second.profile,
         startLevelM: second.profile.startLevelM - 1,
         endLevelM: second.profile.endLevelM - 1,
+        pieces: second.profile.pieces.map((piece) => ({ ...piece, levelM: piece.levelM - 1 })),
       },
     };
     expect(

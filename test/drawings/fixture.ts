@@ -12,6 +12,7 @@ import type {
   Support,
   Unit,
 } from '../../lib/model/index.ts';
+import { profileFor, proposedProfile, roadLevelAt } from '../../lib/site/index.ts';
 
 /**
  * An invented crossing, the River Wend at Low Ferry, with six options drawn up by hand so that drawings and charts can be
@@ -42,6 +43,14 @@ const road = {
   mayRiseM: 1.5,
   maxGradient: 0.06,
   fillSideSlope: 2,
+  designSpeedKmh: 'unknown',
+  crestRadiusM: 'unknown',
+  sagRadiusM: 'unknown',
+  startTieIn: 'moves',
+  endTieIn: 'moves',
+  startApproachM: 'unknown',
+  endApproachM: 'unknown',
+  approachSides: 'slopes',
 } as const;
 
 export const site: Site = {
@@ -82,6 +91,7 @@ export const site: Site = {
     },
   ],
   road,
+  roadCurves: { crestRadiusM: 3000, sagRadiusM: 2000 },
   deck: {
     widthM: 12.5,
     carriagewayM: 9,
@@ -809,12 +819,12 @@ function option(row: Row): AppraisedOption {
     designs: row.designs,
     depthM: main?.depthM ?? { support: 0, midspan: 0 },
     profile: {
-      startLevelM: 20.45 + riseM,
-      endLevelM: 18.2 + riseM,
+      ...proposedProfile({
+        ...site,
+        road: { ...road, startLevelM: road.startLevelM + riseM, endLevelM: road.endLevelM + riseM },
+      }),
       startRiseM: riseM,
       endRiseM: riseM,
-      addedFillM3: 0,
-      gradient: -0.0098,
     },
     supports: supports(row.units, row.designs, riseM, row.pylonAt),
     lines: [],
@@ -832,6 +842,7 @@ function option(row: Row): AppraisedOption {
       stayCableKg: 0,
       mainCableKg: 0,
     },
+    hundredMm: { fillM3: 90, wallM2: 0, amount: 1530 },
     headroom: { spareM: 0.5, reason: '5.90 m over rail', chainageM: 1276.6 },
     deckAreaM2: area,
     cost: { p10, p50, p90 },
@@ -958,3 +969,25 @@ export const standing: Standing = {
   within: { 1: 0.85, 2: 0.9, 3: 0.6, 4: 0.5, 5: 0.05, 6: 0.4 },
   because: ['2 leads: cheapest at the median'],
 };
+
+/** The same crossing with its road a metre lower at both ends, so that the railway asks for a crest. */
+export const lowSite: Site = {
+  ...site,
+  road: { ...road, startLevelM: 19.2, endLevelM: 17.2, fixedEnd: 'none', mayRiseM: 3 },
+  roadCurves: { crestRadiusM: 1700, sagRadiusM: 1300 },
+};
+
+/** An option on the road that the low crossing needs for it, its supports moved along. */
+export function crested(drawn: AppraisedOption): AppraisedOption {
+  const found = profileFor(lowSite, drawn.depthM.support + 0.2);
+  if (!found.ok) throw new Error('expected a road over the railway');
+  const { profile } = found;
+  const supports = drawn.supports.map((support) => ({
+    ...support,
+    topLevelM:
+      support.topLevelM +
+      roadLevelAt(profile, support.chainageM) -
+      roadLevelAt(drawn.profile, support.chainageM),
+  }));
+  return { ...drawn, profile, supports };
+}

@@ -41,7 +41,7 @@ import {
   sourceForms,
   spanRows,
 } from './figures.ts';
-import { budget, obstacles, options, site, standing } from './fixture.ts';
+import { budget, crested, lowSite, obstacles, options, site, standing } from './fixture.ts';
 
 const second = options[1]!;
 const third = options[2]!;
@@ -84,6 +84,7 @@ const joined = { at: '3+010', uses: ['1+010', '2+010'], usedBy: ['4+010', '5+010
 export const sheets: Readonly<Record<string, () => Piece>> = {
   forms,
   crossing: () => crossing({ site, option: second, obstacles, widthPx: 980 }),
+  'crossing-crest': () => crossing({ site: lowSite, option: crested(second), obstacles, widthPx: 980 }),
   'crossing-handles': () =>
     crossing({ site, option: second, obstacles, widthPx: 980, handles: true, band: false }),
   'crossing-shelf': () => smallCrossing(site, 2500, 'shelf'),

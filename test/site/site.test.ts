@@ -5,6 +5,7 @@ import {
   deckSpec,
   groundAt,
   profileFor,
+  roadLevelAt,
   soffitLimitAt,
   stretchAt,
   survey,
@@ -121,13 +122,14 @@ describe('survey', () => {
 });
 
 describe('profileFor', () => {
+  // A crest of 1000 km is straight but for its sagitta: 100^2 / 8e6 = 1.25 mm in the middle of 100 m.
+  const STRAIGHT_M = 1e6;
+  const SAGITTA_M = 0.00125;
   const fixedEnd = {
-    startLevelM: 6,
-    endLevelM: 6,
+    ...plainBrief().road,
     fixedEnd: 'end',
-    mayRiseM: 2,
-    maxGradient: 0.05,
-    fillSideSlope: 2,
+    crestRadiusM: STRAIGHT_M,
+    sagRadiusM: 0,
   } as const;
   const middle = { obstacles: [obstacle(40, 60, clear(50, 50.0001, 5))] };
 
@@ -139,40 +141,60 @@ describe('profileFor', () => {
     });
   });
 
-  it('profileFor(fixed end) pivots about it: twice the shortage at the middle, no rise at the end', () => {
-    // By hand: 5 + 1.3 - 6 = 0.3 short at the middle; the start rises by 0.3 / 0.5.
+  it('profileFor(fixed end, no crest) pivots about it: twice the shortage at the middle, no rise at the end', () => {
+    // By hand: 5 + 1.3 - 6 = 0.3 short at the middle less the sagitta; the start rises by twice that.
     const result = profileFor(survey(plainBrief({ ...middle, road: fixedEnd })), 1.3);
-    expect(result.ok && result.profile.startRiseM).toBeCloseTo(0.6, 4);
-    expect(result.ok && result.profile.endRiseM).toBe(0);
-    // By hand: (12 (6.6^2 - 6^2)/2 + 2 (6.6^3 - 6^3)/3)/0.05.
-    const fill = ((12 * (6.6 ** 2 - 36)) / 2 + (2 * (6.6 ** 3 - 216)) / 3) / 0.05;
-    expect(result.ok && result.profile.addedFillM3).toBeCloseTo(fill, 0);
+    if (!result.ok) throw new Error('expected a road');
+    const { profile } = result;
+    const rise = 2 * (0.3 - SAGITTA_M);
+    expect(profile.startRiseM).toBeCloseTo(rise, 5);
+    expect(profile.endRiseM).toBe(0);
+    expect(roadLevelAt(profile, 50)).toBeCloseTo(6.3, 5);
   });
 
-  it('profileFor(both ends fixed) refuses, names the limit and says by how much it is missed', () => {
+  it('profileFor(both ends fixed, no crest) refuses, names the limit and says by how much it is missed', () => {
     const road = { ...fixedEnd, fixedEnd: 'both' } as const;
     const result = profileFor(survey(plainBrief({ ...middle, road })), 1.3);
     if (result.ok) throw new Error('expected a refusal');
     expect(result.refusal).toMatchObject({ kind: 'clearance', riseNeededM: null, limit: { reason: 'line' } });
-    expect(result.refusal.missedBy).toBeCloseTo(0.3, 3);
+    expect(result.refusal.missedBy).toBeCloseTo(0.3 - SAGITTA_M, 3);
   });
 
   it('profileFor refused at the most allowed rise says which rise would do', () => {
     const result = profileFor(survey(plainBrief({ ...middle, road: { ...fixedEnd, mayRiseM: 0.4 } })), 1.3);
     if (result.ok) throw new Error('expected a refusal');
-    expect(result.refusal.missedBy).toBeCloseTo(0.1, 3);
-    expect(result.refusal.riseNeededM).toBeCloseTo(0.6, 3);
+    expect(result.refusal.missedBy).toBeCloseTo(0.1 - SAGITTA_M, 3);
+    expect(result.refusal.riseNeededM).toBeCloseTo(0.6 - 2 * SAGITTA_M, 3);
   });
 
   it('profileFor keeps the gradient limit: both ends rise when one alone would be too steep', () => {
     const road = { ...fixedEnd, fixedEnd: 'none', maxGradient: 0.004, mayRiseM: 2 } as const;
     const near = { obstacles: [obstacle(5, 25, clear(10, 10.0001, 5))] };
+    // Straight, the end can fall 0.4 m below the start; with the end fixed the start is stuck there.
+    expect(profileFor(survey(plainBrief({ ...near, road: { ...road, fixedEnd: 'end' } })), 2).ok).toBe(false);
     const result = profileFor(survey(plainBrief({ ...near, road })), 2);
     if (!result.ok) throw new Error('expected a line');
-    // By hand: 1.0 short at x = 10; start r, end r - 0.4 at the steepest: r - 0.04 = 1.
-    expect(result.profile.startRiseM).toBeCloseTo(1.04, 4);
-    expect(result.profile.endRiseM).toBeCloseTo(0.64, 4);
-    expect(Math.abs(result.profile.gradient)).toBeCloseTo(0.004, 9);
+    const { profile } = result;
+    expect(roadLevelAt(profile, 10)).toBeCloseTo(7, 6);
+    expect(Math.abs(profile.gradient)).toBeLessThanOrEqual(0.004);
+    expect(profile.steepestGradient).toBeLessThanOrEqual(0.004 + 1e-12);
+    // Fill costs more the higher it stands, so no end is spared that could have shared.
+    expect(profile.startRiseM).toBeCloseTo(profile.endRiseM + 0.4, 1);
+  });
+
+  it('profileFor lifts a road over the middle by a crest alone where that is enough', () => {
+    // By hand: an arc of 3000 m over 100 m stands 100^2 / 24000 = 0.4167 m above its chord; 0.3 m takes 4166.7 m.
+    const road = { ...fixedEnd, fixedEnd: 'both', crestRadiusM: 3000 } as const;
+    const at = (depth: number) => profileFor(survey(plainBrief({ ...middle, road })), depth);
+    const low = at(1.3);
+    if (!low.ok) throw new Error('expected a crest');
+    expect(low.profile.crestRadiusM).toBeCloseTo(10_000 / 2.4, 1);
+    expect(low.profile.startRiseM).toBe(0);
+    expect(roadLevelAt(low.profile, 50)).toBeCloseTo(6.3, 5);
+    expect(at(1.416).ok).toBe(true);
+    const high = at(1.5);
+    if (high.ok) throw new Error('expected a refusal');
+    expect(high.refusal.missedBy).toBeCloseTo(0.5 - 10_000 / 24_000, 3);
   });
 
   it('profileFor refuses a proposed road that is too steep to begin with', () => {
@@ -194,19 +216,16 @@ describe('profileFor', () => {
   it('profileFor of the worked example: the shallower the deck the lower the road, and every soffit clears', () => {
     const site = survey(lowFerry().brief);
     let before = -1;
-    for (const depth of [1.5, 2, 2.5, 3, 3.5]) {
+    for (const depth of [1.5, 2, 2.5, 3, 3.5, 4]) {
       const result = profileFor(site, depth);
       if (!result.ok) throw new Error(`no line at ${depth} m`);
-      const { startLevelM, endLevelM, startRiseM } = result.profile;
-      expect(startRiseM).toBeGreaterThanOrEqual(before);
-      before = startRiseM;
-      for (const { fromM, toM, levelM } of site.soffitLimits) {
-        for (const x of [fromM, toM]) {
-          const road = startLevelM + ((endLevelM - startLevelM) * (x - site.startM)) / site.lengthM;
-          expect(road - depth).toBeGreaterThanOrEqual(levelM - 1e-6);
-        }
-      }
-      expect(endLevelM).toBe(18.2);
+      const { profile } = result;
+      expect(profile.startRiseM).toBeGreaterThanOrEqual(before);
+      before = profile.startRiseM;
+      for (const { fromM, toM, levelM } of site.soffitLimits)
+        for (const x of [fromM, toM])
+          expect(roadLevelAt(profile, x) - depth).toBeGreaterThanOrEqual(levelM - 1e-6);
+      expect(profile.endLevelM).toBe(18.2);
     }
   });
 

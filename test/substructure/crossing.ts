@@ -1,4 +1,5 @@
 import type { Design, FormId, MeasuredLine, RoadProfile, Site, Unit } from '../../lib/model/index.ts';
+import { proposedProfile } from '../../lib/site/index.ts';
 
 /** An invented crossing of 200 m: level ground at 0, a river from 80 to 120 with its bed at -4 and water at -1. */
 export const crossing: Site = {
@@ -28,7 +29,17 @@ export const crossing: Site = {
     mayRiseM: 2,
     maxGradient: 0.05,
     fillSideSlope: 2,
+    designSpeedKmh: 'unknown',
+    crestRadiusM: 'unknown',
+    sagRadiusM: 'unknown',
+    startTieIn: 'moves',
+    endTieIn: 'moves',
+    startApproachM: 'unknown',
+    endApproachM: 'unknown',
+    approachSides: 'slopes',
   },
+  // Grades meet at an angle, so that volumes can be followed by hand.
+  roadCurves: { crestRadiusM: 0, sagRadiusM: 0 },
   deck: {
     widthM: 12,
     carriagewayM: 9,
@@ -44,14 +55,7 @@ export const crossing: Site = {
   mainOpening: null,
 };
 
-export const profile: RoadProfile = {
-  startLevelM: 10,
-  endLevelM: 10,
-  startRiseM: 0,
-  endRiseM: 0,
-  addedFillM3: 0,
-  gradient: 0,
-};
+export const profile: RoadProfile = proposedProfile(crossing);
 
 /** Loads of a deck in kN per m, spread over its supports by half-spans; enough to stand supports under it. */
 export function plainDesign(spansM: readonly number[], more: Partial<Sized> = {}): Design {

@@ -1,5 +1,7 @@
 import { expect, it } from 'vitest';
 import type { MeasuredLine, Site } from '../../lib/model/index.ts';
+import { proposedProfile } from '../../lib/site/index.ts';
+import { substructureData } from '../../lib/substructure/data.ts';
 import { standSupports } from '../../lib/substructure/index.ts';
 import { items, measure, perM2, quantitiesOf, splitQuantities } from '../../lib/takeoff/index.ts';
 import { crossing, plainDesign, profile, steelLine, unitOn } from '../substructure/crossing.ts';
@@ -39,12 +41,22 @@ const approachFill = (lines: readonly MeasuredLine[]): number =>
     'fill',
   );
 
-it('measure(crossing) has the fill of both approaches by V = (W h^2/2 + s h^3/3)/g and what the option adds', () => {
+it('measure(crossing) has the fill of both approaches by V = (W h^2/2 + s h^3/3)/g', () => {
   // W 12, h 10, s 2, g 5 %: (600 + 666.67) / 0.05 = 25,333 m3 an end.
   expect(approachFill(measured())).toBeCloseTo((2 * (12 * 50 + (2 * 1000) / 3)) / 0.05, 4);
-  expect(
-    approachFill(measured(crossing, { ...profile, addedFillM3: 500 })) - approachFill(measured()),
-  ).toBeCloseTo(500, 6);
+});
+
+it('measure(crossing between walls) has W h of fill, and walls of 2 h of face made like the wings of an abutment', () => {
+  const walled: Site = { ...crossing, road: { ...crossing.road, approachSides: 'walls' } };
+  const lines = measured(walled, proposedProfile(walled)).filter(({ part }) => part === 'approaches');
+  // h 10 run out over 200 m: W h^2/2g = 12,000 m3 and a face of h^2/g = 2,000 m2 an end.
+  expect(sum(lines, 'fill')).toBeCloseTo(2 * 12_000, 6);
+  const { abutment, footing } = substructureData;
+  const stem = 4000 * abutment.wingM;
+  const foot = 4000 * abutment.wingFootingWidth * abutment.wingFootingM;
+  expect(sum(lines, 'abutment-concrete')).toBeCloseTo(stem, 6);
+  expect(sum(lines, 'footing-concrete')).toBeCloseTo(foot, 6);
+  expect(sum(lines, 'reinforcement')).toBeCloseTo(stem * abutment.barsKgM3 + foot * footing.barsKgM3, 4);
 });
 
 it('measure(railway) counts possessions by method and pieces over the track', () => {

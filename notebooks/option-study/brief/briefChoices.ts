@@ -24,6 +24,16 @@ export const fixedEndChoices: readonly Choice<Road['fixedEnd']>[] = [
   { value: 'none', words: 'either end' },
 ];
 
+export const tieInChoices: readonly Choice<Road['startTieIn']>[] = [
+  { value: 'moves', words: 'moves' },
+  { value: 'fixed', words: 'stays' },
+];
+
+export const approachSideChoices: readonly Choice<Road['approachSides']>[] = [
+  { value: 'slopes', words: 'run out in side slopes' },
+  { value: 'walls', words: 'stand between walls' },
+];
+
 export const loadingChoices: readonly Choice<StandardId>[] = [
   { value: 'lm1', words: 'EN 1991-2, LM1' },
   { value: 'hl93', words: 'AASHTO HL-93' },

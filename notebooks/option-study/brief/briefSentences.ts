@@ -7,7 +7,7 @@ import { inWords } from './inWords.ts';
 import { budgetAmount, planShapeOf, provedOf } from './madeFields.ts';
 import { accessSentence, budgetSentence, groundSentence } from './meansSentences.ts';
 import { problemBeside } from './problemBeside.ts';
-import { roadSentence, waterSentence } from './roadSentences.ts';
+import { approachSentence, roadSentence, roadShape, waterSentence } from './roadSentences.ts';
 
 /** The stretch whose width decides the main opening: the widest that bars supports; -1 where none does. */
 function widestBarred(obstacles: readonly Obstacle[]): number {
@@ -40,6 +40,7 @@ function shape(study: Study): unknown {
     widestBarred(brief.obstacles),
     brief.waters.map(({ name, floodLevelM }) => [name, floodLevelM === 'unknown']),
     brief.road.fixedEnd,
+    roadShape(brief.road),
     provedOf(study),
     brief.budget === 'unknown',
     books.currency,
@@ -65,7 +66,11 @@ export function briefSentences(graph: Graph, store: StudyStore): HTMLElement {
             envelopeSentence(words, store, obstacle, index),
           ]),
         ],
-        [waters.map((_, index) => waterSentence(words, study, index)), roadSentence(words, study)],
+        [
+          waters.map((_, index) => waterSentence(words, study, index)),
+          roadSentence(words, study),
+          approachSentence(words, study),
+        ],
         [groundSentence(words, study), accessSentence(words), budgetSentence(words, study, amount)],
       ];
       return h(

@@ -1,7 +1,7 @@
-import type { Study } from '../../../lib/index.ts';
+import type { Road, Study } from '../../../lib/index.ts';
 import type { HtmlChild } from '../../html.ts';
 import type { Path } from '../../page/index.ts';
-import { fixedEndChoices, loadingChoices } from './briefChoices.ts';
+import { approachSideChoices, fixedEndChoices, loadingChoices, tieInChoices } from './briefChoices.ts';
 import { place, type InWords } from './inWords.ts';
 
 /** A water, its flood, and what the soffit keeps clear of it. */
@@ -64,7 +64,80 @@ export function waterSentence({ fields, height }: InWords, { brief }: Study, ind
   ];
 }
 
-/** The road's levels, what may rise, its gradient and fill, and what it carries. */
+/** What the words about the road hang on besides its figures. */
+export const roadShape = (road: Road): unknown => [
+  road.crestRadiusM === 'unknown',
+  road.sagRadiusM === 'unknown',
+  road.startTieIn,
+  road.endTieIn,
+  road.startApproachM === 'unknown',
+  road.endApproachM === 'unknown',
+];
+
+/** A least radius, which follows from the design speed until it is given. */
+const radius = (
+  fields: InWords['fields'],
+  key: 'crestRadiusM' | 'sagRadiusM',
+  label: string,
+  from: number,
+): HTMLElement =>
+  fields.figure(['brief', 'road', key], {
+    label,
+    places: 0,
+    unit: 'm',
+    step: 100,
+    unknown: 'the usual radius',
+    from,
+    min: { value: 0 },
+    max: { value: 1e6 },
+  });
+
+/** How the road is joined to the ground behind each end that may rise, and how its fill is held. */
+export function approachSentence({ fields }: InWords, { brief }: Study): HtmlChild {
+  const { road } = brief;
+  const free = (['start', 'end'] as const).filter((end) => road.fixedEnd !== end && road.fixedEnd !== 'both');
+  return [
+    free.map((end) => {
+      const stays = road[`${end}TieIn`] === 'fixed';
+      return [
+        `Behind the ${end} its tie-in `,
+        fields.choice(['brief', 'road', `${end}TieIn`], {
+          label: `tie-in behind the ${end}`,
+          choices: tieInChoices,
+        }),
+        stays ? (road[`${end}ApproachM`] === 'unknown' ? ' ' : ' at ') : ' within ',
+        fields.figure(['brief', 'road', `${end}ApproachM`], {
+          label: `length of the ${end} approach`,
+          places: 0,
+          unit: 'm',
+          step: 10,
+          unknown: stays ? 'where the proposed road meets the ground' : 'any distance',
+          from: 150,
+          min: { value: 1 },
+          max: { value: 5000 },
+        }),
+        road[`${end}ApproachM`] !== 'unknown' && ' m',
+        '. ',
+      ];
+    }),
+    'The approaches ',
+    fields.choice(['brief', 'road', 'approachSides'], {
+      label: 'sides of the approaches',
+      choices: approachSideChoices,
+    }),
+    '; fill lies at ',
+    fields.figure(['brief', 'road', 'fillSideSlope'], {
+      label: 'side slope of fill, horizontal to vertical',
+      places: 1,
+      step: 0.1,
+      min: { value: 0 },
+      max: { value: 10 },
+    }),
+    ' to 1. ',
+  ];
+}
+
+/** The road's levels, what may rise, its gradient and curves, and what it carries. */
 export function roadSentence({ fields, height }: InWords, { brief }: Study): HtmlChild {
   return [
     'The road is proposed at ',
@@ -89,15 +162,24 @@ export function roadSentence({ fields, height }: InWords, { brief }: Study): Htm
       min: { value: 0.1 },
       max: { value: 25 },
     }),
-    ' %, and its fill slopes at ',
-    fields.figure(['brief', 'road', 'fillSideSlope'], {
-      label: 'side slope of fill, horizontal to vertical',
-      places: 1,
-      step: 0.1,
-      min: { value: 0 },
-      max: { value: 10 },
+    ' %; its curves suit ',
+    fields.figure(['brief', 'road', 'designSpeedKmh'], {
+      label: 'design speed',
+      places: 0,
+      unit: 'km/h',
+      step: 10,
+      unknown: 'an unknown number of',
+      from: 70,
+      min: { value: 10 },
+      max: { value: 200 },
     }),
-    ' to 1. It carries ',
+    ' km/h, with crests of ',
+    radius(fields, 'crestRadiusM', 'least radius of a crest', 3000),
+    brief.road.crestRadiusM !== 'unknown' && ' m',
+    ' and sags of ',
+    radius(fields, 'sagRadiusM', 'least radius of a sag', 2000),
+    brief.road.sagRadiusM !== 'unknown' && ' m',
+    ' or more. It carries ',
     fields.choice(['brief', 'loading'], { label: 'load standard', choices: loadingChoices }),
     ' on ',
     fields.figure(['brief', 'surfacingM'], {

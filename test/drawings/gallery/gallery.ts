@@ -29,7 +29,9 @@ import { checks, depthPoints, measures, published, spanRows } from '../figures.t
 
 const asked = new URLSearchParams(location.search);
 /** `?study` shows the worked example as it is worked out; otherwise the figures drawn up by hand. */
-function worked(): Omit<typeof invented, 'options'> & { options: typeof invented.options } {
+function worked(): Omit<typeof invented, 'options' | 'crested' | 'lowSite'> & {
+  options: typeof invented.options;
+} {
   const read = readStudy(lowFerry);
   if (!read.ok) throw new RangeError(JSON.stringify(read.problems));
   const study = read.value;

@@ -1,0 +1,49 @@
+import { ofOption } from '../drawing/asked.ts';
+import { fixed } from '../format.ts';
+import type { HtmlChild } from '../html.ts';
+import type { AppraisedOption } from '../model.ts';
+import { workedFigure } from '../page/index.ts';
+
+/** How the road runs over the bridge, and how far it reaches behind it. */
+export function roadWords(option: AppraisedOption): HtmlChild {
+  const { crestRadiusM, steepestGradient, approaches } = option.profile;
+  const figure = (field: string, text: string): HTMLElement =>
+    workedFigure(ofOption(option, `profile/${field}`), text);
+  return [
+    crestRadiusM === null
+      ? 'The road runs straight between the abutments'
+      : [
+          'The road runs over a crest of ',
+          figure('crestRadiusM', fixed(Math.round(crestRadiusM / 10) * 10, 0)),
+          ' m radius',
+        ],
+    ', nowhere steeper than ',
+    figure('steepestGradient', fixed(100 * steepestGradient, 1)),
+    ' % there; its approaches take ',
+    figure('approaches/start/lengthM', fixed(approaches.start.lengthM, 0)),
+    ' m at the start and ',
+    figure('approaches/end/lengthM', fixed(approaches.end.lengthM, 0)),
+    ' m at the end to meet the ground, which is taken as level beyond the survey.',
+  ];
+}
+
+/** What 100 mm more of construction depth would cost in the approaches. */
+export function depthPrice(option: AppraisedOption, currency: string): HtmlChild {
+  const { hundredMm } = option;
+  if (hundredMm === null) return 'No road clears with a deck 100 mm deeper.';
+  const { amount, fillM3, wallM2 } = hundredMm;
+  const figure = (field: string, text: string): HTMLElement =>
+    workedFigure(ofOption(option, `hundredMm/${field}`), text);
+  if (Math.abs(amount) < 0.5) return 'Another 100 mm of depth costs nothing in the approaches.';
+  return [
+    amount > 0
+      ? 'Another 100 mm of depth costs the approaches '
+      : 'Another 100 mm of depth is taken up by the crest, whose steeper ends spare the approaches ',
+    figure('amount', fixed(Math.round(Math.abs(amount) / 10) * 10, 0)),
+    ` ${currency}: `,
+    figure('fillM3', fixed(Math.abs(fillM3), 0)),
+    ' m³ of fill',
+    Math.abs(wallM2) > 0.5 && [' and ', figure('wallM2', fixed(Math.abs(wallM2), 0)), ' m² of wall'],
+    '.',
+  ];
+}
