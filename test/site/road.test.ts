@@ -12,15 +12,27 @@ describe('roadCurves', () => {
   const { road } = plainBrief();
   it('roadCurves(speed) is 100 K of the row at that speed or the next above it', () => {
     // CD 109: K 30 and 20 at 70 km/h, 55 and 20 at 85; AASHTO: K 11 and 18 at 60 km/h (both from memory).
-    expect(roadCurves({ ...road, designSpeedKmh: 70 }, 'lm1')).toEqual({ crestRadiusM: 3000, sagRadiusM: 2000 });
-    expect(roadCurves({ ...road, designSpeedKmh: 71 }, 'lm1')).toEqual({ crestRadiusM: 5500, sagRadiusM: 2000 });
-    expect(roadCurves({ ...road, designSpeedKmh: 60 }, 'hl93')).toEqual({ crestRadiusM: 1100, sagRadiusM: 1800 });
+    expect(roadCurves({ ...road, designSpeedKmh: 70 }, 'lm1')).toEqual({
+      crestRadiusM: 3000,
+      sagRadiusM: 2000,
+    });
+    expect(roadCurves({ ...road, designSpeedKmh: 71 }, 'lm1')).toEqual({
+      crestRadiusM: 5500,
+      sagRadiusM: 2000,
+    });
+    expect(roadCurves({ ...road, designSpeedKmh: 60 }, 'hl93')).toEqual({
+      crestRadiusM: 1100,
+      sagRadiusM: 1800,
+    });
     expect(roadCurves({ ...road, designSpeedKmh: 160 }, 'lm1').crestRadiusM).toBe(18_200);
   });
 
   it('roadCurves(unknown speed) is that of 70 km/h, and a radius that is given stands', () => {
     expect(roadCurves(road, 'lm1')).toEqual({ crestRadiusM: 3000, sagRadiusM: 2000 });
-    expect(roadCurves({ ...road, crestRadiusM: 800 }, 'lm1')).toEqual({ crestRadiusM: 800, sagRadiusM: 2000 });
+    expect(roadCurves({ ...road, crestRadiusM: 800 }, 'lm1')).toEqual({
+      crestRadiusM: 800,
+      sagRadiusM: 2000,
+    });
   });
 });
 
@@ -57,7 +69,9 @@ describe('approaches', () => {
 
   it('profileFor(an approach that may not reach far) lifts that end only as high as it can run out', () => {
     const limit = (levelM: number) => ({
-      ...survey(withRoad({ ...angled, fixedEnd: 'end', mayRiseM: 10, startApproachM: 160, maxGradient: 0.05 })),
+      ...survey(
+        withRoad({ ...angled, fixedEnd: 'end', mayRiseM: 10, startApproachM: 160, maxGradient: 0.05 }),
+      ),
       soffitLimits: [{ fromM: 0, toM: 5, levelM, reason: 'lane', kind: 'road' as const }],
     });
     // 160 m at 5 % come down 8 m, so the start may stand at 8.00.
