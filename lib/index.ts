@@ -17,6 +17,8 @@ export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
 export type { PricedAppraisal } from './appraise/appraiseOption.ts';
 export { depthTrials } from './appraise/depthTrials.ts';
 export { formFacts } from './appraise/facts.ts';
+export { PIER_HALF_WIDTH_M } from './appraise/requestFor.ts';
+export { ruledOut } from './appraise/ruledOut.ts';
 export { memory, type Memory } from './appraise/memory.ts';
 export { workbench, type Workbench } from './appraise/workbench.ts';
 export { publishedBands, type BandColumn, type PublishedBand } from './bands/publishedBands.ts';

@@ -1,3 +1,11 @@
 /** The shapes of the pipeline as the pages read them: one place to import them from. */
 export type * from '../lib/index.ts';
-export { billParts, constructionDepth, families, familyOf, formIds, roadLevelAt } from '../lib/index.ts';
+export {
+  PIER_HALF_WIDTH_M,
+  billParts,
+  constructionDepth,
+  families,
+  familyOf,
+  formIds,
+  roadLevelAt,
+} from '../lib/index.ts';

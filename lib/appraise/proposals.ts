@@ -3,10 +3,11 @@ import { formModule } from '../forms/index.ts';
 import type { Arrangement, FormId, MethodId, Pattern, Site } from '../model/index.ts';
 import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
-import { arrangementFacts, formFacts } from './facts.ts';
+import { arrangementFacts } from './facts.ts';
 import type { Proposals } from './memory.ts';
 import { relaxationWords } from './relaxationWords.ts';
 import { requestFor } from './requestFor.ts';
+import { ruledOut } from './ruledOut.ts';
 import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
 
@@ -34,8 +35,7 @@ export function outBecause({ study, site }: Workbench, form: FormId): readonly s
     }
   }
   if (study.options.workOutAnyway.includes(form)) return [];
-  const rulings = rulingsFor('form', form, formFacts(site));
-  return rulings.filter(({ effect }) => effect === 'out').flatMap(({ because }) => because);
+  return ruledOut(site, form);
 }
 
 /**

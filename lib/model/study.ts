@@ -250,6 +250,8 @@ export interface KeptOption {
   readonly units: readonly Unit[];
   /** Structural depth at midspan of the main unit, m; null = least crossing cost. */
   readonly depthM: number | null;
+  /** Supports that hold their place while others are moved: 0-based along the crossing, abutments counted. */
+  readonly locked?: readonly number[];
 }
 
 /** Empty until the deciding pages are built; kept in the file so that nothing is lost. */

@@ -189,6 +189,7 @@ const options = z.strictObject({
         method: z.enum(methodIds),
         units: z.array(unit).min(1).max(100),
         depthM: z.number().positive().max(100).nullable().default(null),
+        locked: z.array(z.int().min(1).max(4999)).max(5000).exactOptional(),
       }),
     )
     .max(1000)

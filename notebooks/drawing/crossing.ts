@@ -18,7 +18,17 @@ import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
-import { pierHandles } from './pierHandles.ts';
+import { briefHandles } from './briefHandles.ts';
+import {
+  barredPiers,
+  depthHandle,
+  freeBar,
+  pierFeet,
+  pierHandles,
+  spanChanges,
+  spanFigures,
+  type InHand,
+} from './pierHandles.ts';
 import { placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
@@ -42,10 +52,14 @@ export interface CrossingInput {
   /** Data band under the elevation; on unless said otherwise, and off at 1:2000 and smaller. */
   readonly band?: boolean;
   readonly bar?: boolean;
-  /** Piers can be taken hold of. */
-  readonly handles?: boolean;
+  /** Piers, depth, spans and what the brief says can be taken hold of, unless the drawing is small. */
+  readonly handles?: InHand;
   readonly prefix?: string;
 }
+
+/** A span with what it has changed by, where there is room for both. */
+const withChange = (figure: string, change: string, spanM: number, frame: Frame): string =>
+  textWidth(figure + change, letters.table) + 6 < spanM * frame.pxPerM ? figure + change : figure;
 
 /** Gradient of a straight road at its left end; over a crest those at both abutments with its radius. */
 function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
@@ -155,6 +169,7 @@ export function crossing(input: CrossingInput): Piece {
   const figures = inside
     .slice(1)
     .map((at, index) => (small ? length(at - (inside[index] ?? at)) : fixed(at - (inside[index] ?? at), 1)));
+  const changes = option === null ? [] : spanChanges(option, input.handles?.hold ?? null);
   const total = fixed(site.lengthM, 1);
   const band = withBand
     ? dataBand(site, option, frame, bottomY + 6, { accent: ink.accent, datumM: Math.floor(range.bottomM) })
@@ -163,6 +178,8 @@ export function crossing(input: CrossingInput): Piece {
   const height = afterBand + (withBar ? (width < 620 ? 56 : 42) : 4);
   const clip = `${prefix}-window`;
   const figureWidth = Math.max(...figures.map((figure) => textWidth(figure, letters.table)));
+  const bodyEnd = frame.y(range.bottomM);
+  const hands = small ? undefined : input.handles;
   const narrowest = Math.min(
     ...inside.slice(1).map((at, index) => frame.x(at) - frame.x(inside[index] ?? at)),
   );
@@ -200,7 +217,12 @@ export function crossing(input: CrossingInput): Piece {
         levels,
         named,
         below,
-        input.handles === true && option !== null && pierHandles(option, frame),
+        option !== null && !small && barredPiers(site, option, frame, ink.accent),
+        option !== null &&
+          hands !== undefined && [
+            pierFeet(option, frame, bodyEnd + 6, hands.locked),
+            freeBar(site, option, frame, bodyEnd + 14, hands.hold),
+          ],
       ),
       several &&
         !small &&
@@ -211,12 +233,28 @@ export function crossing(input: CrossingInput): Piece {
           asked: ['site/lengthM'],
         }),
       inside.length > 1 &&
-        dimensionChain(inside.map(frame.x), dimensionBottom, figures, {
-          weight: 600,
-          size: dimensionSize,
-          asked: inside.length === chainages.length && option !== null ? spanPaths(option) : ['site/lengthM'],
-        }),
+        dimensionChain(
+          inside.map(frame.x),
+          dimensionBottom,
+          figures.map((figure, i) =>
+            withChange(figure, changes[i] ?? '', (inside[i + 1] ?? 0) - (inside[i] ?? 0), frame),
+          ),
+          {
+            weight: 600,
+            size: dimensionSize,
+            asked:
+              inside.length === chainages.length && option !== null ? spanPaths(option) : ['site/lengthM'],
+          },
+        ),
       band?.piece,
+      hands !== undefined && [
+        input.obstacles !== undefined && briefHandles(site, input.obstacles, frame, hands.hold),
+        option !== null && [
+          spanFigures(option, frame, dimensionBottom - 8),
+          depthHandle(site, option, frame, hands.hold),
+          pierHandles(option, frame, hands),
+        ],
+      ],
       withBar &&
         scaleBar(scale, Math.max(frame.x(site.startM), 8), afterBand + 26, {
           rightPx: width,
@@ -229,6 +267,6 @@ export function crossing(input: CrossingInput): Piece {
           'stroke-width': pens.fine,
         }),
     ],
-    input.handles === true ? 'group' : 'img',
+    hands === undefined ? 'img' : 'group',
   );
 }

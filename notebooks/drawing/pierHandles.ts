@@ -1,62 +1,226 @@
-import { fixed } from '../format.ts';
-import type { AppraisedOption } from '../model.ts';
-import { supportName } from './alongOption.ts';
+import { fixed, level } from '../format.ts';
+import type { AppraisedOption, Site } from '../model.ts';
+import { placedUnits, soffitLevel, spansOf, supportChainages, supportName } from './alongOption.ts';
 import type { Frame } from './frame.ts';
-import { colours, pens } from './ink.ts';
+import { barredAt, freeStretches } from './freeStretches.ts';
+import { handle, typedFigure } from './handle.ts';
+import type { Hold } from './hold.ts';
+import { colours, letters, pens } from './ink.ts';
+import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 
-/**
- * Handles of the piers: open squares of 6.2 px halfway up the shaft with a tick either side at 7.6, the way they move.
- * Each is a slider for keys and readers; `data-support` is the index of its support, `data-from-m` and `data-scale` of the
- * elevation turn pixels into chainage. Abutments do not move.
- */
-export function pierHandles(option: AppraisedOption, frame: Frame): Piece {
-  const last = option.supports.length - 1;
+/** Two supports never come closer than this by hand, m. */
+const APART_M = 2;
+
+/** The option in hand and what is known of it. */
+export interface InHand {
+  readonly hold: Hold | null;
+  /** Supports that are locked, by their place along the crossing. */
+  readonly locked: readonly number[];
+}
+
+/** Where a pier may go between its neighbours, m. */
+function roomOf(at: readonly number[], index: number): { readonly fromM: number; readonly toM: number } {
+  const here = at[index] ?? NaN;
+  return {
+    fromM: Math.min(here, (at[index - 1] ?? here) + APART_M),
+    toM: Math.max(here, (at[index + 1] ?? here) - APART_M),
+  };
+}
+
+/** Handles of the piers, halfway up the shaft; abutments do not move. In hand: the old place dashed. */
+export function pierHandles(option: AppraisedOption, frame: Frame, { hold, locked }: InHand): Piece {
+  const at = supportChainages(option);
+  const last = at.length - 1;
   return g(
     { class: 'handles' },
-    option.supports.map((support, index) => {
-      if (index === 0 || index === last || support.chainageM < frame.fromM || support.chainageM > frame.toM)
-        return null;
-      const x = frame.x(support.chainageM);
-      const y = frame.y((support.topLevelM + support.groundLevelM) / 2);
-      const name = supportName(index, option.supports.length);
-      return g(
+    at.map((chainageM, index) => {
+      if (index === 0 || index === last || chainageM < frame.fromM || chainageM > frame.toM) return null;
+      const support = option.supports.find((one) => Math.abs(one.chainageM - chainageM) < 0.06);
+      if (support === undefined) return null;
+      const room = roomOf(at, index);
+      const key = `pier/${String(index)}`;
+      const [top, foot] = [frame.y(support.topLevelM), frame.y(support.groundLevelM)];
+      const isLocked = locked.includes(index);
+      return handle(
         {
-          class: 'handle',
-          'data-support': index,
-          role: 'slider',
-          tabindex: 0,
-          'aria-label': `${name}, chainage`,
-          'aria-valuenow': support.chainageM,
-          'aria-valuemin': option.supports[index - 1]?.chainageM,
-          'aria-valuemax': option.supports[index + 1]?.chainageM,
-          'aria-valuetext': `${fixed(support.chainageM, 1)} m`,
+          key,
+          name: `${supportName(index, at.length)}, chainage${isLocked ? ', locked' : ''}`,
+          valueM: chainageM,
+          leastM: room.fromM,
+          mostM: room.toM,
+          places: 1,
+          words: `ch ${fixed(chainageM, 1)}`,
+          perPx: [1 / frame.pxPerM, 0],
+          x: frame.x(chainageM),
+          y: (top + foot) / 2,
+          isLocked,
+          wordsAt: [frame.x(chainageM), top - 14 - frame.pxPerM * 3],
+          before: el('path', {
+            d: `M${num(frame.x(hold?.valueM ?? chainageM))},${num(top)}V${num(foot)}`,
+            stroke: colours.second,
+            'stroke-width': pens.thin,
+            'stroke-dasharray': '5 3',
+          }),
         },
-        el('rect', {
-          class: 'grip',
-          x: x - 22,
-          y: y - 22,
-          width: 44,
-          height: 44,
-          fill: colours.sheet,
-          'fill-opacity': 0,
-        }),
-        el('rect', {
-          x: x - 3.1,
-          y: y - 3.1,
-          width: 6.2,
-          height: 6.2,
-          fill: colours.sheet,
-          stroke: colours.ink,
-          'stroke-width': pens.medium,
-        }),
+        hold,
+      );
+    }),
+  );
+}
+
+/** At the foot of each pier a circle where it is free to move, a solid triangle where it is locked. */
+export function pierFeet(option: AppraisedOption, frame: Frame, y: number, locked: readonly number[]): Piece {
+  const at = supportChainages(option);
+  return g(
+    { class: 'feet' },
+    at.slice(1, -1).map((chainageM, i) => {
+      const x = frame.x(chainageM);
+      return locked.includes(i + 1)
+        ? el('path', { d: `M${num(x)},${num(y - 4.6)}l4.4,7.6h-8.8Z`, fill: colours.ink })
+        : el('circle', {
+            cx: x,
+            cy: y,
+            r: 2.6,
+            fill: colours.sheet,
+            stroke: colours.ink,
+            'stroke-width': pens.thin,
+          });
+    }),
+  );
+}
+
+/** Where the pier in hand may stand: a heavy bar for each free stretch, what is barred left out. */
+export function freeBar(
+  site: Site,
+  option: AppraisedOption,
+  frame: Frame,
+  y: number,
+  hold: Hold | null,
+): Piece | null {
+  const index = hold?.key.startsWith('pier/') === true ? Number(hold.key.slice(5)) : NaN;
+  const at = supportChainages(option);
+  if (at[index] === undefined) return null;
+  return g(
+    { class: 'free' },
+    freeStretches(site, roomOf(at, index)).map(({ fromM, toM }) =>
+      el('path', {
+        d: `M${num(frame.x(fromM))},${num(y - 3)}v6M${num(frame.x(fromM))},${num(y)}H${num(frame.x(toM))}M${num(frame.x(toM))},${num(y - 3)}v6`,
+        fill: 'none',
+        stroke: colours.ink,
+        'stroke-width': pens.thick,
+      }),
+    ),
+  );
+}
+
+/** Piers that stand where none may: crossed out in the accent, with the reason. */
+export function barredPiers(site: Site, option: AppraisedOption, frame: Frame, accent: string): Piece | null {
+  const at = supportChainages(option);
+  if (at.slice(1, -1).every((chainageM) => barredAt(site, chainageM) === undefined)) return null;
+  return g(
+    { class: 'barred-piers' },
+    at.slice(1, -1).map((chainageM, i) => {
+      const barred = barredAt(site, chainageM);
+      const support = option.supports[i + 1];
+      if (barred === undefined || support === undefined) return null;
+      const x = frame.x(chainageM);
+      const y = frame.y(support.groundLevelM);
+      const words = `${supportName(i + 1, at.length)} may not stand here: ${barred.name}`;
+      const isRoom = x + 12 + textWidth(words, letters.drawing) < frame.right;
+      return g(
+        {},
         el('path', {
-          d: `M${num(x - 7.6)},${num(y - 3)}v6M${num(x + 7.6)},${num(y - 3)}v6`,
-          stroke: colours.ink,
-          'stroke-width': pens.medium,
+          d: `M${num(x - 6)},${num(y - 6)}l12,12m0,-12l-12,12`,
+          fill: 'none',
+          stroke: accent,
+          'stroke-width': pens.thick,
+        }),
+        label(x + (isRoom ? 10 : -10), y - 8, words, {
+          fill: accent,
+          halo: true,
+          anchor: isRoom ? 'start' : 'end',
         }),
       );
+    }),
+  );
+}
+
+/** Handle of the depth, on the soffit in the middle of the longest span of the main unit. */
+export function depthHandle(
+  site: Site,
+  option: AppraisedOption,
+  frame: Frame,
+  hold: Hold | null,
+): Piece | null {
+  const main = placedUnits(option).find(({ unit }) => unit.role === 'main');
+  if (main === undefined) return null;
+  const { supportsM } = main.unit;
+  const spans = supportsM.slice(1).map((x, i) => x - supportsM[i]!);
+  const longest = spans.indexOf(Math.max(...spans));
+  // Off the middle, where the depth is written.
+  const chainageM = supportsM[longest]! + 0.42 * spans[longest]!;
+  const { depthM } = main.design.task;
+  const x = frame.x(chainageM);
+  const y = frame.y(soffitLevel(site, option, chainageM));
+  if (!Number.isFinite(y)) return null;
+  const was = y + ((hold?.valueM ?? depthM) - depthM) * frame.pxPerM;
+  return handle(
+    {
+      key: 'depth',
+      name: `depth at midspan of option ${String(option.number)}`,
+      valueM: depthM,
+      leastM: 0.2,
+      mostM: Math.max(depthM, spans[longest]! / 4),
+      places: 2,
+      words: `${level(depthM)} deep`,
+      perPx: [0, 1 / frame.pxPerM],
+      x,
+      y,
+      before: el('path', {
+        d: `M${num(x - 26)},${num(was)}h52`,
+        stroke: colours.second,
+        'stroke-width': pens.thin,
+        'stroke-dasharray': '5 3',
+      }),
+    },
+    hold,
+  );
+}
+
+/** What each span has changed by since the pier was taken, in words; empty where it has not. */
+export function spanChanges(option: AppraisedOption, hold: Hold | null): string[] {
+  const before = hold?.supportsM ?? [];
+  return spansOf(option).map((span, i) => {
+    if (before.length !== supportChainages(option).length) return '';
+    const change = span - ((before[i + 1] ?? NaN) - (before[i] ?? NaN));
+    return Math.abs(change) < 0.05 ? '' : ` (${change < 0 ? '−' : '+'}${Math.abs(change).toFixed(1)})`;
+  });
+}
+
+/** The spans of an option as figures that are typed over in their dimension line at y. */
+export function spanFigures(option: AppraisedOption, frame: Frame, y: number): Piece {
+  const at = supportChainages(option);
+  return g(
+    { class: 'handles spans' },
+    spansOf(option).map((spanM, i) => {
+      const middleM = (at[i]! + at[i + 1]!) / 2;
+      const widthPx = textWidth(fixed(spanM, 1), letters.table);
+      if (middleM < frame.fromM || middleM > frame.toM || widthPx + 4 > spanM * frame.pxPerM) return null;
+      return typedFigure({
+        key: `span/${String(i)}`,
+        name: `span ${String(i + 1)}`,
+        valueM: spanM,
+        leastM: APART_M,
+        mostM: at.at(-1)! - at[0]!,
+        places: 1,
+        words: `${fixed(spanM, 1)} m`,
+        x: frame.x(middleM),
+        y,
+        widthPx,
+      });
     }),
   );
 }

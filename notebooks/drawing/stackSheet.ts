@@ -8,6 +8,7 @@ import type { Frame } from './frame.ts';
 import type { Paper } from './ink.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
+import type { InHand } from './pierHandles.ts';
 import { el, g, num } from './piece.ts';
 import type { Scale } from './scale.ts';
 
@@ -27,6 +28,8 @@ export interface StackInput {
   readonly notes?: Readonly<Record<number, string>>;
   readonly paper?: Paper;
   readonly prefix?: string;
+  /** Piers, depth and spans of the reference can be taken hold of. */
+  readonly hands?: InHand;
 }
 
 /** Room left of the sheet for the bar of the reference option, px; the drawing is that much wider than asked. */
@@ -58,6 +61,7 @@ export function chosenRow(
   top: number,
   bottom: number,
   children: readonly (Piece | null | false)[],
+  hands: readonly (Piece | null)[] = [],
 ): Piece {
   const { input, unit } = shared;
   const reference = input.reference === option.number;
@@ -65,7 +69,11 @@ export function chosenRow(
   const within = input.standing.within[option.number];
   const words = `${optionWords(option)}: ${money2(p50 / unit.per)} ${unit.label}, ${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}${within === undefined ? '' : `, ${odds(within)} % within budget`}${option.status === 'out' ? ', out' : ''}`;
   return g(
-    { class: reference ? 'row reference' : 'row', 'data-option': option.number },
+    {
+      class: reference ? 'row reference' : 'row',
+      'data-key': `row ${String(option.number)}`,
+      'data-option': option.number,
+    },
     el('rect', {
       class: 'frame',
       role: 'button',
@@ -81,6 +89,7 @@ export function chosenRow(
       stroke: 'none',
     }),
     g({ 'aria-hidden': 'true' }, children),
+    hands,
     reference &&
       el('path', {
         d: `M${num(2.65 / 2 - stackOutset)},${num(top + 4)}V${num(bottom - 4)}`,

@@ -5,22 +5,101 @@ const svgSpace = 'http://www.w3.org/2000/svg';
 /** Counts drawings put into pages, so that the patterns and windows of one never stand in for those of another. */
 let drawn = 0;
 
+/** What an element of a page was made from: its piece, the nodes of the children, and the mark of its drawing. */
+interface Made {
+  readonly piece: Piece;
+  readonly nodes: readonly ChildNode[];
+  /** Ends the ids of its drawing; null outside a drawing. */
+  readonly own: string | null;
+}
+const made = new WeakMap<Element, Made>();
+
+/** The value of an attribute in the page: ids inside a drawing are its own. */
+const valueIn = (own: string | null, name: string, value: string): string =>
+  own === null ? value : name === 'id' ? value + own : value.replace(/^url\(#(.+)\)$/, `url(#$1${own})`);
+
 function build(piece: Piece, document: Document, svg: string | null): Element {
   const own = svg ?? (piece.tag === 'svg' ? `-${String((drawn += 1))}` : null);
   const element =
     own === null ? document.createElement(piece.tag) : document.createElementNS(svgSpace, piece.tag);
-  for (const [name, value] of Object.entries(piece.attrs)) {
-    const renamed =
-      own === null ? value : name === 'id' ? value + own : value.replace(/^url\(#(.+)\)$/, `url(#$1${own})`);
-    element.setAttribute(name, renamed);
-  }
-  for (const child of piece.children)
-    element.append(typeof child === 'string' ? child : build(child, document, own));
+  for (const [name, value] of Object.entries(piece.attrs))
+    element.setAttribute(name, valueIn(own, name, value));
+  const nodes = piece.children.map((child) => nodeFor(child, document, own));
+  element.append(...nodes);
+  made.set(element, { piece, nodes, own });
   return element;
 }
+
+const nodeFor = (child: Piece | string, document: Document, own: string | null): ChildNode =>
+  typeof child === 'string' ? document.createTextNode(child) : build(child, document, own);
 
 /**
  * Turns a piece into an element of the given document. Elements inside an `svg` are SVG elements, all others HTML; ids
  * inside a drawing are made its own.
  */
 export const toDom = (piece: Piece, document: Document): Element => build(piece, document, null);
+
+/** What a child of one drawing is recognised by in the next. */
+const signOf = (child: Piece | string): string =>
+  typeof child === 'string' ? '' : `${child.tag} ${child.attrs['data-key'] ?? child.attrs['class'] ?? ''}`;
+
+/** For each child of the next drawing the index of the one it takes over, or -1. */
+function pairs(before: Piece['children'], next: Piece['children']): number[] {
+  const free = new Map<string, number[]>();
+  before.forEach((child, i) => {
+    const sign = signOf(child);
+    const list = free.get(sign);
+    if (list === undefined) free.set(sign, [i]);
+    else list.push(i);
+  });
+  return next.map((child) => free.get(signOf(child))?.shift() ?? -1);
+}
+
+function patch(element: Element, { piece: before, nodes, own }: Made, next: Piece): void {
+  if (before === next) return;
+  for (const name of Object.keys(before.attrs)) {
+    if (!(name in next.attrs)) element.removeAttribute(name);
+  }
+  for (const [name, value] of Object.entries(next.attrs)) {
+    if (before.attrs[name] !== value) element.setAttribute(name, valueIn(own, name, value));
+  }
+  const { ownerDocument } = element;
+  const taken = pairs(before.children, next.children);
+  const fresh = next.children.map((child, i): ChildNode => {
+    const from = taken[i]!;
+    const node = nodes[from];
+    if (node === undefined) return nodeFor(child, ownerDocument, own);
+    if (typeof child === 'string') {
+      if (before.children[from] !== child) (node as Text).data = child;
+    } else patch(node as Element, made.get(node as Element)!, child);
+    return node;
+  });
+  const stays = new Set(fresh);
+  for (const node of nodes) if (!stays.has(node)) node.remove();
+  // From the end, so that what stands right already is not moved: a node that is moved loses the focus.
+  fresh.reduceRight<ChildNode | null>((after, node) => {
+    if (node.parentNode !== element || (after !== null && node.nextSibling !== after))
+      element.insertBefore(node, after);
+    return node;
+  }, null);
+  made.set(element, { piece: next, nodes: fresh, own });
+}
+
+/** Whether an element was made by `toDom` from a piece of the same kind, so that it can be redrawn. */
+export function isDrawingOf(element: Element, next: Piece): boolean {
+  const piece = made.get(element)?.piece;
+  return piece !== undefined && signOf(piece) === signOf(next);
+}
+
+/**
+ * Makes an element that `toDom` has made show another piece: what is the same stays as it is, the rest is changed in
+ * place. Parts are recognised by tag and `data-key`, else `class`, in order. Reads nothing from the page.
+ *
+ * @returns false where the element was not made from a piece of that tag, and nothing was done
+ */
+export function redraw(element: Element, next: Piece): boolean {
+  const own = made.get(element);
+  if (own === undefined || own.piece.tag !== next.tag) return false;
+  patch(element, own, next);
+  return true;
+}

@@ -14,6 +14,15 @@ import { textWidth } from './lettering.ts';
 import { mainSpan, optionNote, optionTitle } from './optionWords.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
+import {
+  barredPiers,
+  depthHandle,
+  freeBar,
+  pierFeet,
+  pierHandles,
+  spanChanges,
+  spanFigures,
+} from './pierHandles.ts';
 import { scaleBar } from './scaleBar.ts';
 import { sheet } from './sheet.ts';
 import type { StackRow, StackSheet } from './stackSheet.ts';
@@ -26,7 +35,7 @@ function title(shared: StackSheet, option: AppraisedOption, y: number, room: num
   const spans = spansText(spansOf(option));
   const note = input.notes?.[option.number] ?? optionNote(input.site, option);
   const end = reference
-    ? ['reference', shared.ink.accent]
+    ? [option.status === 'out' ? 'reference, out' : 'reference', shared.ink.accent]
     : option.status === 'out'
       ? ['out', colours.ink]
       : null;
@@ -120,26 +129,39 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
   const spans = spansOf(option);
   const deckY = frame.y(option.profile.startLevelM);
   const narrowest = Math.min(...spans) * frame.pxPerM;
+  const hands = input.reference === option.number ? input.hands : undefined;
+  const changes = spanChanges(option, hands?.hold ?? null);
+  const written = (span: number, i: number): string => {
+    const figure = length(span);
+    const whole = figure + (changes[i] ?? '');
+    if (textWidth(whole, letters.table) + 6 < span * frame.pxPerM) return whole;
+    return textWidth(figure, 11) < narrowest || span * frame.pxPerM > 26 ? figure : '';
+  };
   const figureY = Math.max(deckY + 10, titleY + 24);
-  const piece = chosenRow(shared, option, top, bottom, [
+  const drawn = [
     title(shared, option, titleY, bodyPx),
     elevationBody(site, option, frame, ink, range, { plain: scale >= 2000 }),
-    dimensionChain(
-      chainages.map(frame.x),
-      dimensionY,
-      spans.map((span) =>
-        textWidth(length(span), 11) < narrowest || span * frame.pxPerM > 26 ? length(span) : '',
-      ),
-      {
-        boldest: mainSpan(option),
-        halo: true,
-        size: narrowest > 30 ? letters.table : letters.drawing,
-        colour: colours.ink,
-        asked: spanPaths(option),
-      },
-    ),
+    dimensionChain(chainages.map(frame.x), dimensionY, spans.map(written), {
+      boldest: mainSpan(option),
+      halo: true,
+      size: narrowest > 30 ? letters.table : letters.drawing,
+      colour: colours.ink,
+      asked: spanPaths(option),
+    }),
     figures(shared, option, bodyPx + 22, input.widthPx, Math.min(figureY, bottom - 42)),
-  ]);
+    barredPiers(site, option, frame, ink.accent),
+    hands !== undefined && pierFeet(option, frame, dimensionY, hands.locked),
+    hands !== undefined && freeBar(site, option, frame, dimensionY + 8, hands.hold),
+  ];
+  const taken =
+    hands === undefined
+      ? []
+      : [
+          spanFigures(option, frame, dimensionY - 8),
+          depthHandle(site, option, frame, hands.hold),
+          pierHandles(option, frame, hands),
+        ];
+  const piece = chosenRow(shared, option, top, bottom, drawn, taken);
   return { piece, bottom, frame };
 }
 

@@ -1,22 +1,73 @@
-import type { Appraisal, Site } from '../../lib/index.ts';
+import { ruledOut } from '../../lib/index.ts';
+import type { Appraisal, FormId, Site } from '../../lib/index.ts';
 import { crossing } from '../drawing/crossing.ts';
 import { chooseReference, listenToStack, type ChooseReference } from '../drawing/listenToStack.ts';
 import { largestScale, pxPerMetre } from '../drawing/scale.ts';
 import { stack, stackOnPaper } from '../drawing/stack.ts';
-import { toDom } from '../drawing/toDom.ts';
 import { formLooks } from '../forms/formLook.ts';
-import { fixed } from '../format.ts';
-import { h } from '../html.ts';
+import { fixed, listed } from '../format.ts';
+import { h, type HtmlChild } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
 import { riverTable } from './riverTable.ts';
+import type { Graph } from '../reactive/index.ts';
+import { asItStandsNote } from './asItStandsNote.ts';
+import { byHand } from './byHand.ts';
+import { handsOn } from './handsOn.ts';
+import { studyDesk } from './studyDesk.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
 
 const droppedTotal = ({ droppedCounts }: Appraisal): number =>
   droppedCounts.reduce((sum, dropped) => sum + dropped.count, 0);
 
+/** The study with a form worked out although a rule puts it out, or left out again. */
+const anyway = (store: StudyStore, form: FormId, isAsked: boolean): void =>
+  store.edit(
+    (study) => {
+      const others = study.options.workOutAnyway.filter((one) => one !== form);
+      const workOutAnyway = isAsked ? [...others, form] : others;
+      return { ...study, options: { ...study.options, workOutAnyway } };
+    },
+    { what: isAsked ? 'working a form out anyway' : 'leaving a form out' },
+  );
+
+/** What may be done about a form that the rules put out. */
+function anywayAction(store: StudyStore, form: FormId, isAsked: boolean): HTMLElement {
+  const words = isAsked ? 'leave it out again' : 'work it out anyway';
+  return h(
+    'button',
+    {
+      type: 'button',
+      class: 'action list',
+      'data-key': `anyway.${form}`,
+      'aria-label': `${formLooks[form].short}: ${words}`,
+      onclick: () => anyway(store, form, !isAsked),
+    },
+    words,
+  );
+}
+
+/** Forms worked out against the rules, each with the way back. */
+function anywayWords(store: StudyStore, { site, options }: Appraisal): HtmlChild {
+  const { workOutAnyway } = store.valid().options;
+  const against = workOutAnyway.filter((form) => ruledOut(site, form).length > 0);
+  return against.map((form) => {
+    const numbers = options.filter((option) => option.form === form).map(({ number }) => String(number));
+    const as = numbers.length === 0 ? '' : ` as option ${listed(numbers)}`;
+    return h(
+      'p',
+      { class: 'small' },
+      `${formLooks[form].short} is worked out${as} although ${ruledOut(site, form).join('; ')}; it never leads. `,
+      anywayAction(store, form, true),
+    );
+  });
+}
+
 /** What was not worked out, by form and reason. */
-function droppedTable(appraisal: Appraisal): HTMLElement {
+function droppedTable(appraisal: Appraisal, store: StudyStore): HTMLElement {
+  const { workOutAnyway } = store.valid().options;
+  const isOut = (form: FormId): boolean =>
+    !workOutAnyway.includes(form) && ruledOut(appraisal.site, form).length > 0;
   const rows = [
     ...appraisal.dropped.map(({ form, because }) => ({
       form,
@@ -51,7 +102,13 @@ function droppedTable(appraisal: Appraisal): HTMLElement {
             {},
             h('th', { scope: 'row' }, formLooks[form].short),
             h('td', { class: 'text' }, reason),
-            h('td', { 'data-figure': figure }, count === null ? 'form dropped' : fixed(count, 0)),
+            h(
+              'td',
+              { 'data-figure': figure },
+              count === null
+                ? ['form dropped', isOut(form) && [' ', anywayAction(store, form, false)]]
+                : fixed(count, 0),
+            ),
           ),
         ),
       ),
@@ -60,8 +117,13 @@ function droppedTable(appraisal: Appraisal): HTMLElement {
 }
 
 /** Section 3: every option drawn on one chainage and one scale, with its cost beside it. */
-export function arrangementSection(page: Sheet, store: StudyStore, cells: StudyCells): LineSection {
-  const { appraisal, reference, brief, site } = cells;
+export function arrangementSection(
+  page: Sheet,
+  graph: Graph,
+  store: StudyStore,
+  cells: StudyCells,
+): LineSection {
+  const { appraisal, asItStands, books, brief, hands, options, reference, site, stacked } = cells;
   const finding = page.live({ appraisal }, (v) => {
     const kept = v.appraisal.options.length;
     const dropped = droppedTotal(v.appraisal);
@@ -73,43 +135,74 @@ export function arrangementSection(page: Sheet, store: StudyStore, cells: StudyC
       what: 'reference',
     });
   };
+  /** Table of what was dropped: the same while something is dragged, and open as it was left. */
+  let dropped: { readonly of: Appraisal; readonly element: HTMLElement } | null = null;
+  const droppedBy = (of: Appraisal): HTMLElement => {
+    if (dropped?.of === of) return dropped.element;
+    const element = h('div', {}, riverTable(of), anywayWords(store, of), droppedTable(of, store));
+    if (dropped?.element.querySelector('details')?.open === true)
+      element.querySelector('details')!.open = true;
+    dropped = { of, element };
+    return element;
+  };
+  const stackCell = page.cell({
+    station: '3+020',
+    title: 'Arrangements',
+    shows: { stacked, brief, hands },
+    awaits: [appraisal],
+    owns: [appraisal, stacked],
+    wide: true,
+    long: true,
+    body: (v, room) => {
+      if (v.stacked === null) return null;
+      const { options: drawn, movedNumber } = v.stacked;
+      const { site, standing, currency } = v.stacked.appraisal;
+      const within = Object.fromEntries(
+        Object.entries(standing.within).filter(([number]) => Number(number) !== movedNumber),
+      );
+      const input = {
+        site,
+        options: drawn,
+        standing: { ...standing, within },
+        budget: budgetOf(v.brief),
+        currency,
+        reference: v.stacked.reference?.number ?? null,
+        widthPx: room.widthPx,
+        prefix: 'stack',
+      };
+      if (room.isPaper) return stackOnPaper(input).map((part) => h('div', { class: 'part' }, part));
+      return [stack({ ...input, hands: v.hands }), droppedBy(v.stacked.appraisal)];
+    },
+  });
+  listenToStack(stackCell.element);
+  stackCell.element.addEventListener(chooseReference, chosen);
+  handsOn(stackCell, studyDesk(graph, store, cells));
   return page.section(3, 'Arrangements', finding, [
     page.cell({
       station: '3+010',
-      title: 'How to read the stack',
-      shows: { brief },
-      body: h(
-        'p',
-        { class: 'prose' },
-        'Click an elevation to make it the reference everywhere. Grey bands are barred to supports. All stand on one chainage and one scale.',
-      ),
+      title: 'The reference by hand',
+      shows: { reference, options },
+      body: (v) =>
+        byHand(
+          v.reference,
+          v.options.kept.find(({ number }) => number === (v.reference?.number ?? v.options.reference)),
+          store,
+        ),
+      notes: [
+        h(
+          'p',
+          {},
+          'Click an elevation to make it the reference everywhere. Grey bands are barred to supports. All stand on one chainage and one scale.',
+        ),
+      ],
     }),
     page.cell({
-      station: '3+020',
-      title: 'Arrangements',
-      shows: { appraisal, reference, brief },
-      owns: [appraisal, reference],
-      wide: true,
-      long: true,
-      body: (v, room) => {
-        const { site, options, standing, currency } = v.appraisal;
-        const input = {
-          site,
-          options,
-          standing,
-          budget: budgetOf(v.brief),
-          currency,
-          reference: v.reference?.number ?? null,
-          widthPx: room.widthPx,
-          prefix: 'stack',
-        };
-        if (room.isPaper) return stackOnPaper(input).map((part) => h('div', { class: 'part' }, part));
-        const drawing = toDom(stack(input), document);
-        listenToStack(drawing);
-        drawing.addEventListener(chooseReference, chosen);
-        return [drawing, riverTable(v.appraisal), droppedTable(v.appraisal)];
-      },
+      station: '3+015',
+      title: 'What it comes to',
+      shows: { asItStands, books },
+      body: (v) => h('div', { class: 'prose' }, asItStandsNote(v.asItStands, v.books.currency)),
     }),
+    stackCell,
     page.cell({
       station: '3+030',
       title: 'Main opening at a larger scale',

@@ -3,6 +3,7 @@ import { crossing } from '../drawing/crossing.ts';
 import { plan } from '../drawing/plan.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
+import { handsOn } from './handsOn.ts';
 import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
 import { briefSentences } from './brief/briefSentences.ts';
@@ -11,6 +12,7 @@ import { groundTable } from './brief/groundTable.ts';
 import { obstacleTable } from './brief/obstacleTable.ts';
 import { groundNames, oddsTable } from './brief/oddsTable.ts';
 import { waterTable } from './brief/waterTable.ts';
+import { studyDesk } from './studyDesk.ts';
 import type { StudyCells } from './studyCells.ts';
 import { crossingWords } from './words.ts';
 
@@ -28,7 +30,37 @@ const presetNotes = ({ obstacles }: Brief): HtmlChild =>
 
 /** Section 1: the brief in prose, drawing and tables, each figure changed where it stands. */
 export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
-  const { brief, books, site, reference, asItStands } = cells;
+  const { brief, books, site, reference, asItStands, hands } = cells;
+  const crossingCell = page.cell({
+    station: '1+020',
+    title: 'Crossing',
+    shows: { site, brief, books, reference, asItStands, hands },
+    owns: [site],
+    body: (v, room) =>
+      crossing({
+        site: v.site,
+        option: v.reference,
+        obstacles: v.brief.obstacles,
+        widthPx: room.widthPx,
+        prefix: 'crossing',
+        ...(!room.isPaper && { handles: v.hands }),
+      }),
+    notes: (v) => [
+      asItStandsNote(v.asItStands, v.books.currency),
+      h(
+        'p',
+        {},
+        'Point at the drawing: piers, soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier.',
+      ),
+      h(
+        'p',
+        {},
+        'Last rows of the band: the lowest soffit that headroom, flood and freeboard allow, and what is spare.',
+      ),
+      h('p', { class: 'source' }, 'Founding shown for the likeliest ground of each stretch.'),
+    ],
+  });
+  handsOn(crossingCell, studyDesk(graph, store, cells));
   return page.section(
     1,
     'Brief',
@@ -49,29 +81,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
           h('p', {}, 'Drag a figure sideways, use the arrow keys, or type; ? for not known.'),
         ],
       }),
-      page.cell({
-        station: '1+020',
-        title: 'Crossing',
-        shows: { site, brief, books, reference, asItStands },
-        owns: [site],
-        body: (v, room) =>
-          crossing({
-            site: v.site,
-            option: v.reference,
-            obstacles: v.brief.obstacles,
-            widthPx: room.widthPx,
-            prefix: 'crossing',
-          }),
-        notes: (v) => [
-          asItStandsNote(v.asItStands, v.books.currency),
-          h(
-            'p',
-            {},
-            'Last rows of the band: the lowest soffit that headroom, flood and freeboard allow, and what is spare.',
-          ),
-          h('p', { class: 'source' }, 'Founding shown for the likeliest ground of each stretch.'),
-        ],
-      }),
+      crossingCell,
       page.cell({
         station: '1+025',
         title: 'Plan',

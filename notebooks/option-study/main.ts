@@ -143,7 +143,7 @@ async function start(): Promise<void> {
     sections: [
       briefSection(page, graph, store, cells),
       spanSection(page, cells),
-      arrangementSection(page, store, cells),
+      arrangementSection(page, graph, store, cells),
       depthSection(page, cells),
       sectionSection(page, cells),
       quantitySection(page, cells),

@@ -1,5 +1,7 @@
 import { appraiseKept, depthTrials, formFacts, guide, memory, survey } from '../../lib/index.ts';
 import type { Appraisal, AppraisedOption, RegisterEntry, Study } from '../../lib/index.ts';
+import type { Hold } from '../drawing/hold.ts';
+import type { InHand } from '../drawing/pierHandles.ts';
 import { share, untilDragRests, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import type { Appraiser } from '../worker/index.ts';
@@ -21,6 +23,15 @@ export interface AsItStands {
   readonly faults: readonly string[];
   /** True while the search has not answered: arrangement and depths are those it had before. */
   readonly isFrozen: boolean;
+}
+
+/** The options of the last appraisal, the reference among them as it is now. */
+export interface Stacked {
+  readonly appraisal: Appraisal;
+  readonly options: readonly AppraisedOption[];
+  readonly reference: AppraisedOption | null;
+  /** Number of the option whose odds are not known any more; null where all are. */
+  readonly movedNumber: number | null;
 }
 
 const nobody: AsItStands = { option: null, faults: [], isFrozen: false };
@@ -75,11 +86,20 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     if (state.state === 'ready' && answered) graph.set(last, { asked: answered, appraisal: state.value });
   });
   const kept = memory();
+  /** Options kept by hand as they were last worked out: one that cannot be worked out any more is not lost. */
+  const seen = new Map<number, AppraisedOption>();
+  const held = (study: Study, { appraisal }: Answer, number: number | null): AppraisedOption | undefined => {
+    for (const option of appraisal.options) seen.set(option.number, option);
+    const isKept = study.options.kept.some((one) => one.number === number);
+    const found = appraisal.options.some((option) => option.number === number);
+    return isKept && !found && number !== null ? seen.get(number) : referenceIn(appraisal, number);
+  };
   const asItStands = graph.cell('as it stands', { options, asked, last }, (v): AsItStands => {
     if (v.last === null) return nobody;
-    const before = referenceIn(v.last.appraisal, v.options.reference);
+    const before = held(v.asked, v.last, v.options.reference);
     if (before === undefined) return nobody;
-    if (v.last.asked === v.asked) return { option: before, faults: before.faults, isFrozen: false };
+    if (v.last.asked === v.asked && v.last.appraisal.options.includes(before))
+      return { option: before, faults: before.faults, isFrozen: false };
     return { ...appraiseKept(v.asked, before, kept), isFrozen: true };
   });
   const reference = graph.cell('reference', { asItStands }, (v) => v.asItStands.option);
@@ -97,6 +117,24 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     },
     { policy: 'latest' },
   );
+  const hold = graph.input<Hold | null>('hold', null);
+  const hands = graph.cell('hands', { hold, options, reference }, (v): InHand => {
+    const own = v.options.kept.find(({ number }) => number === v.reference?.number);
+    return { hold: v.hold, locked: own?.locked ?? [] };
+  });
+  const stacked = graph.cell('stacked', { last, asked, asItStands }, (v): Stacked | null => {
+    if (v.last === null) return null;
+    const { appraisal, options } = { ...v.last, options: v.last.appraisal.options };
+    const { option, isFrozen } = v.asItStands;
+    // On another site the others are not comparable: the old stack stays until it is worked out.
+    const isSameSite = v.last.asked.brief === v.asked.brief;
+    if (option === null || !isFrozen || !isSameSite) {
+      const reference = held(v.asked, v.last, v.asked.options.reference ?? option?.number ?? null);
+      return { appraisal, options, reference: reference ?? null, movedNumber: null };
+    }
+    const now = options.map((one) => (one.number === option.number ? option : one));
+    return { appraisal, options: now, reference: option, movedNumber: option.number };
+  });
   const spanning = graph.cell('spanning', { site }, (v) => {
     const { mainSpanM } = formFacts(v.site);
     if (typeof mainSpanM !== 'number') return null;
@@ -112,12 +150,16 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
   return {
     brief,
     books,
+    options,
     site,
     asked,
     appraisal,
     asItStands,
     reference,
     byDepth,
+    hold,
+    hands,
+    stacked,
     spanning,
     register: () => register,
   };

@@ -1,9 +1,9 @@
 import { h } from '../html.ts';
 import type { HtmlChild } from '../html.ts';
 import type { Cell, Graph, Progress, State, Uses, Values } from '../reactive/index.ts';
-import { exchange } from './exchange.ts';
 import type { Frames } from './frames.ts';
 import { lateness } from './lateness.ts';
+import { renew } from './renew.ts';
 import type { Way } from './refusal.ts';
 import { waysOn } from './refusal.ts';
 import type { StationState } from '../drawing/stationLine.ts';
@@ -26,6 +26,8 @@ export interface CellSpec<U extends Uses> {
   readonly title: string;
   /** The cells of the graph it shows, by the name its parts know them under. */
   readonly shows: U;
+  /** Slow cells its values are made from by and by: while they run it says so, and its drawing follows all the same. */
+  readonly awaits?: readonly Cell<unknown>[];
   /** Cells that belong to this station although one further up shows them too. */
   readonly owns?: readonly Cell<unknown>[];
   readonly body: Part<U>;
@@ -127,21 +129,29 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   let isNear = true;
   let isOwed = false;
   let bodyError: unknown;
+  /** Its size has changed, and with it the places of the stations below. */
+  let isResized = false;
+  const awaited = new Map<Cell<unknown>, State<unknown>>();
   let paper: Room | null = null;
   const stops: (() => void)[] = [];
 
+  /** What failed: its own values, or something they are made from by and by. */
+  const failedState = () => [state, ...awaited.values()].find((one) => one.state === 'failed');
+  const isWaiting = (): boolean => [state, ...awaited.values()].some((one) => one.state === 'pending');
+
   const stationState = (): StationState => {
     if (bodyError !== undefined) return 'failed';
-    if (state.state === 'failed') {
-      const home = page.homeOf(state.raisedBy) ?? station;
+    const failed = failedState();
+    if (failed !== undefined) {
+      const home = page.homeOf(failed.raisedBy) ?? station;
       return home === station ? 'failed' : 'held';
     }
-    return state.state === 'pending' && late.isLate() ? 'pending' : 'done';
+    return isWaiting() && late.isLate() ? 'pending' : 'done';
   };
 
   const drawPart = (target: HTMLElement, part: Part<U>, values: Values<U>, room: Room): boolean => {
     if (typeof part !== 'function') return true;
-    return exchange(target, h('div', {}, part(values, room)));
+    return renew(target, part(values, room));
   };
 
   const draw = (): void => {
@@ -167,7 +177,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   };
 
   const sayFailure = (): void => {
-    const error = bodyError ?? (state.state === 'failed' ? state.error : undefined);
+    const error = bodyError ?? failedState()?.error;
     const { words, ways = [] } = page.explain(error, station);
     failure.replaceChildren(h('p', { class: 'failure' }, words), ...waysOn(ways));
   };
@@ -177,7 +187,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     return other === undefined ? progressWords(progress) : `waits for ${other}`;
   };
   const heldWords = (): string => {
-    const failed = state.state === 'failed' ? page.homeOf(state.raisedBy) : undefined;
+    const raisedBy = failedState()?.raisedBy;
+    const failed = raisedBy === undefined ? undefined : page.homeOf(raisedBy);
     return `held at the last good figures${failed === undefined ? '' : `, because ${failed} has failed`}`;
   };
 
@@ -198,21 +209,26 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     if (waits) updateSoon();
     else draw();
     const now = stationState();
-    if (waits && element.dataset['state'] === now) return;
-    element.dataset['state'] = now;
-    element.classList.toggle('pending', now === 'pending');
-    element.classList.toggle('held', now === 'held');
-    element.classList.toggle('failed', now === 'failed');
-    element.setAttribute('aria-busy', String(now === 'pending'));
+    const isSame = element.dataset['state'] === now;
+    if (waits && isSame) return;
     say(now);
-    page.changed();
+    if (!isSame) {
+      element.dataset['state'] = now;
+      element.classList.toggle('pending', now === 'pending');
+      element.classList.toggle('held', now === 'held');
+      element.classList.toggle('failed', now === 'failed');
+      element.setAttribute('aria-busy', String(now === 'pending'));
+    }
+    // Telling the lines costs the page a layout.
+    if (!isSame || isResized) page.changed();
+    isResized = false;
   };
   const updateSoon = (): void => frames.request(update);
   const late = lateness(updateSoon);
 
   const show = (next: State<Values<U>>): void => {
     state = next;
-    late.set(next.state === 'pending');
+    late.set(isWaiting());
     if (next.state !== 'pending') progress = undefined;
     updateSoon();
   };
@@ -224,7 +240,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   return {
     station,
     title,
-    shows: Object.values(spec.shows),
+    shows: [...Object.values(spec.shows), ...(spec.awaits ?? [])],
     owns: spec.owns ?? [],
     element,
     label,
@@ -234,16 +250,24 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       body.append(...h('div', {}, standing(spec.body)).childNodes);
       notes?.append(...h('div', {}, standing(spec.notes)).childNodes);
       stops.push(graph.view(spec.shows, show));
-      for (const cell of Object.values(spec.shows)) {
+      const awaits = spec.awaits ?? [];
+      for (const cell of [...Object.values(spec.shows), ...awaits]) {
         if (cell.kind !== 'slow') continue;
         const watch = (one: State<unknown>): void => {
           progress = one.state === 'pending' ? one.progress : undefined;
+          if (awaits.includes(cell)) {
+            const isNews = awaited.get(cell)?.state !== one.state;
+            awaited.set(cell, one);
+            late.set(isWaiting());
+            if (isNews) updateSoon();
+          }
           if (late.isLate()) updateSoon();
         };
         stops.push(graph.watch(cell, watch));
       }
       const watcher = new ResizeObserver(() => {
         bodyPx = body.clientWidth;
+        isResized = true;
         updateSoon();
       });
       watcher.observe(body);

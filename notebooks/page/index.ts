@@ -20,6 +20,7 @@ export { wordsInput, type WordsInput, type WordsSpec } from './wordsInput.ts';
 export { standing, type StandingSpec } from './standing.ts';
 export { pushed } from './pushed.ts';
 export { draggable, untilDragRests, type Drag, type DragAt } from './dragging.ts';
+export { takeHold, type HandDesk } from './takeHold.ts';
 export { whereFrom, type Ask, type WhereFrom } from './whereFrom.ts';
 export { workedFigure } from './workedFigure.ts';
 export { undoKeys, type Undoable } from './undoKeys.ts';

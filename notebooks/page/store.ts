@@ -40,6 +40,8 @@ export interface StudyStore {
   readonly edit: (change: (study: Study) => Study, words?: EditWords) => void;
   /** Ends the step under way, e.g. on release of a drag; a step that came back to its start is forgotten. */
   readonly endStep: () => void;
+  /** Takes back the step under way as if it had never been begun, e.g. on Escape; without one it does nothing. */
+  readonly dropStep: () => void;
   readonly undo: () => void;
   readonly redo: () => void;
   /** Puts another study in its place and forgets the history. Throws when it is not valid: check it first. */
@@ -165,6 +167,14 @@ export function studyStore(
     },
 
     endStep,
+
+    dropStep() {
+      const last = done.at(-1);
+      if (!isOpen || last === undefined) return;
+      isOpen = false;
+      done.pop();
+      take(last.before);
+    },
 
     undo() {
       endStep();

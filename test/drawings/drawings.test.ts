@@ -97,13 +97,19 @@ describe('crossing(input)', () => {
   });
 
   it('with handles gives every pier one that keys can reach, and the abutments none', () => {
-    const piece = crossing({ site, option: second, obstacles, widthPx: 980, handles: true });
-    const handles = [...elements(piece)].filter(({ attrs }) => attrs['class'] === 'handle');
+    const piece = crossing({
+      site,
+      option: second,
+      obstacles,
+      widthPx: 980,
+      handles: { hold: null, locked: [] },
+    });
+    const handles = [...elements(piece)].filter(({ attrs }) => attrs['data-handle']?.startsWith('pier/'));
     expect(
-      handles.map(({ attrs }) => [attrs['data-support'], attrs['aria-valuenow'], attrs['tabindex']]),
+      handles.map(({ attrs }) => [attrs['data-handle'], attrs['aria-valuenow'], attrs['tabindex']]),
     ).toEqual([
-      ['1', '1310', '0'],
-      ['2', '1400', '0'],
+      ['pier/1', '1310', '0'],
+      ['pier/2', '1400', '0'],
     ]);
     expect(piece.attrs['role']).toBe('group');
   });

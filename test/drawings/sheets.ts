@@ -86,7 +86,14 @@ export const sheets: Readonly<Record<string, () => Piece>> = {
   crossing: () => crossing({ site, option: second, obstacles, widthPx: 980 }),
   'crossing-crest': () => crossing({ site: lowSite, option: crested(second), obstacles, widthPx: 980 }),
   'crossing-handles': () =>
-    crossing({ site, option: second, obstacles, widthPx: 980, handles: true, band: false }),
+    crossing({
+      site,
+      option: second,
+      obstacles,
+      widthPx: 980,
+      handles: { hold: null, locked: [] },
+      band: false,
+    }),
   'crossing-shelf': () => smallCrossing(site, 2500, 'shelf'),
   'crossing-bare': () => crossing({ site, option: null, obstacles, widthPx: 980 }),
   'crossing-small': () => crossing({ site, option: second, obstacles, widthPx: 358 }),

@@ -48,6 +48,22 @@ describe('studyStore', () => {
     expect(value(store.slices.brief).obstacles).toBe(obstacles);
   });
 
+  it('dropStep() takes back the step under way as if it had never been begun, and nothing else', () => {
+    const { store, value, endTo, endM } = opened();
+    const start = endM();
+    endTo(1475);
+    endTo(1480, 'hand');
+    endTo(1485, 'hand');
+    store.dropStep();
+    expect(endM()).toBe(1475);
+    expect(value(store.history)).toEqual({ undo: 'end', redo: null });
+    store.dropStep();
+    expect(endM()).toBe(1475);
+    store.undo();
+    expect(endM()).toBe(start);
+    expect(value(store.history).undo).toBeNull();
+  });
+
   it('edit(change) runs only the cells below the slice that has changed', () => {
     const { g, store, endTo } = opened();
     const runs = { brief: 0, books: 0, head: 0 };

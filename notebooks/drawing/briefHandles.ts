@@ -1,0 +1,99 @@
+import { fixed, level } from '../format.ts';
+import type { Obstacle, Site } from '../model.ts';
+import { groundLevel } from './alongOption.ts';
+import type { Frame } from './frame.ts';
+import { handle } from './handle.ts';
+import type { Hold } from './hold.ts';
+import { colours, pens } from './ink.ts';
+import type { Piece } from './piece.ts';
+import { el, g, num } from './piece.ts';
+
+/** Dashed mark of a length of 40 px where a handle was taken. */
+const wasAt = (x: number, y: number, isUp: boolean): Piece =>
+  el('path', {
+    d: isUp ? `M${num(x - 20)},${num(y)}h40` : `M${num(x)},${num(y - 20)}v40`,
+    stroke: colours.second,
+    'stroke-width': pens.thin,
+    'stroke-dasharray': '5 3',
+  });
+
+/** Handles of what the brief says of the crossing: edges of obstacles, headroom over them, road levels at both ends. */
+export function briefHandles(
+  site: Site,
+  obstacles: readonly Obstacle[],
+  frame: Frame,
+  hold: Hold | null,
+): Piece {
+  const isHeld = (key: string): boolean => hold?.key === key;
+  const inFrame = (at: number): boolean => at >= frame.fromM && at <= frame.toM;
+  const edges = obstacles.flatMap(({ name, fromM, toM }, index) =>
+    (['from', 'to'] as const).flatMap((end) => {
+      const at = end === 'from' ? fromM : toM;
+      if (!inFrame(at)) return [];
+      const key = `obstacle/${String(index)}/${end}`;
+      const y = frame.y(groundLevel(site, at)) + 12;
+      return handle(
+        {
+          key,
+          name: `${name}, ${end} chainage`,
+          valueM: at,
+          leastM: end === 'from' ? site.startM - 500 : fromM + 0.5,
+          mostM: end === 'from' ? toM - 0.5 : site.endM + 500,
+          places: 1,
+          words: `ch ${fixed(at, 1)}`,
+          perPx: [1 / frame.pxPerM, 0],
+          x: frame.x(at),
+          y,
+          before: isHeld(key) ? wasAt(frame.x(hold!.valueM), y, false) : null,
+        },
+        hold,
+      );
+    }),
+  );
+  const clearances = obstacles.flatMap(({ name, clearance }, index) => {
+    if (clearance === null) return [];
+    const at = clearance.fromM + 0.3 * (clearance.toM - clearance.fromM);
+    if (!inFrame(at)) return [];
+    const key = `clearance/${String(index)}`;
+    const [x, y] = [frame.x(at), frame.y(clearance.datumLevelM + clearance.headroomM)];
+    return handle(
+      {
+        key,
+        name: `headroom over ${name}`,
+        valueM: clearance.headroomM,
+        leastM: 0.5,
+        mostM: Math.max(100, clearance.headroomM),
+        places: 2,
+        words: `${level(clearance.headroomM)} clear`,
+        perPx: [0, -1 / frame.pxPerM],
+        x,
+        y,
+        before: isHeld(key) ? wasAt(x, y + (clearance.headroomM - hold!.valueM) * frame.pxPerM, true) : null,
+      },
+      hold,
+    );
+  });
+  const { startLevelM, endLevelM } = site.road;
+  const road = ([site.startM, site.endM] as const).map((at, i) => {
+    const key = i === 0 ? 'road/start' : 'road/end';
+    const levelM = i === 0 ? startLevelM : endLevelM;
+    const [x, y] = [frame.x(at) + (i === 0 ? -16 : 16), frame.y(levelM)];
+    return handle(
+      {
+        key,
+        name: `road level at ${i === 0 ? 'A' : 'B'}`,
+        valueM: levelM,
+        leastM: levelM - 200,
+        mostM: levelM + 200,
+        places: 2,
+        words: `road ${level(levelM)}`,
+        perPx: [0, -1 / frame.pxPerM],
+        x,
+        y,
+        before: isHeld(key) ? wasAt(x, y + (levelM - hold!.valueM) * frame.pxPerM, true) : null,
+      },
+      hold,
+    );
+  });
+  return g({ class: 'handles of-brief' }, edges, clearances, road);
+}

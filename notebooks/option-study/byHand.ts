@@ -1,0 +1,64 @@
+import type { AppraisedOption, KeptOption } from '../../lib/index.ts';
+import { supportName } from '../drawing/alongOption.ts';
+import { optionTitle } from '../drawing/optionWords.ts';
+import { level } from '../format.ts';
+import { h, type HtmlChild } from '../html.ts';
+import type { StudyStore } from '../page/index.ts';
+import { released, withDepth, withLock } from './handEdits.ts';
+
+const action = (words: string, key: string, act: () => void, name = words): HTMLElement =>
+  h(
+    'button',
+    { type: 'button', class: 'action list', 'data-key': key, 'aria-label': name, onclick: act },
+    words,
+  );
+
+/** Whether the reference follows the search or is kept by hand, and what can be done about it. */
+export function byHand(
+  option: AppraisedOption | null,
+  kept: KeptOption | undefined,
+  store: StudyStore,
+): HtmlChild {
+  if (option === null) {
+    return h(
+      'p',
+      { class: 'prose' },
+      'No option is in hand.',
+      kept !== undefined && [' ', giveBack(kept, store)],
+    );
+  }
+  const inner = option.supports.length - 2;
+  const name = `Option ${option.number} (${optionTitle(option)})`;
+  const locks = Array.from({ length: Math.max(0, inner) }, (_, i) => {
+    const index = i + 1;
+    const isLocked = kept?.locked?.includes(index) === true;
+    const word = `${isLocked ? 'Unlock' : 'Lock'} ${supportName(index, inner + 2)}`;
+    const what = `${isLocked ? 'unlocking' : 'locking'} a pier`;
+    return action(word, `lock.${index}`, () =>
+      store.edit((study) => withLock(study, option, index, !isLocked), { what }),
+    );
+  });
+  const said =
+    kept === undefined
+      ? `${name}, the reference, stands as the search proposed it. Take hold of it in the stack: drag a pier or its soffit, or click a span and type. It then keeps your figures under its number.`
+      : kept.depthM === null
+        ? `${name}, the reference, is kept by hand: its supports stay where you put them, its depth is that of least cost.`
+        : `${name}, the reference, is kept by hand: its supports stay where you put them, and its depth of ${level(kept.depthM)} m.`;
+  return [
+    h('p', { class: 'prose' }, said),
+    h('p', { class: 'list-actions' }, [
+      kept !== undefined && giveBack(kept, store),
+      kept !== undefined &&
+        kept.depthM !== null &&
+        action('Depth of least cost', 'depth.free', () =>
+          store.edit((study) => withDepth(study, option, null), { what: 'freeing the depth' }),
+        ),
+      locks,
+    ]),
+  ];
+}
+
+const giveBack = ({ number }: KeptOption, store: StudyStore): HTMLElement =>
+  action('Give it back to the search', 'give.back', () =>
+    store.edit((study) => released(study, number), { what: `giving option ${number} back` }),
+  );

@@ -1,0 +1,155 @@
+import type { AppraisedOption, KeptOption, Study, Unit } from '../../lib/index.ts';
+import { fixed } from '../format.ts';
+import { supportName } from '../drawing/alongOption.ts';
+import { putAt } from '../page/place.ts';
+
+/** The option as the study keeps it by hand; as it stands, with the depth left open, where it is not kept yet. */
+export function keptOf({ options }: Study, option: AppraisedOption): KeptOption {
+  const { number, form, method, units } = option;
+  return options.kept.find((kept) => kept.number === number) ?? { number, form, method, units, depthM: null };
+}
+
+/** The study with an option kept by hand, which becomes the reference: what is in hand is what is looked at. */
+function withKept(study: Study, kept: KeptOption): Study {
+  const { options } = study;
+  const others = options.kept.filter(({ number }) => number !== kept.number);
+  return {
+    ...study,
+    options: {
+      ...options,
+      kept: [...others, kept].sort((a, b) => a.number - b.number),
+      reference: kept.number,
+    },
+  };
+}
+
+/** Two supports that are one, m. */
+const SAME_M = 0.05;
+
+/** Chainages of all supports of a row of units in order, each once, m. */
+function placesOf(units: readonly Unit[]): number[] {
+  const all = units.flatMap(({ supportsM }) => supportsM).sort((a, b) => a - b);
+  return all.filter((at, i) => i === 0 || at - all[i - 1]! > SAME_M);
+}
+
+/** Units with one support moved; where two units meet both ends move. */
+const moved = (units: readonly Unit[], fromM: number, toM: number): Unit[] =>
+  units.map((unit) => ({
+    ...unit,
+    supportsM: unit.supportsM.map((x) => (Math.abs(x - fromM) <= SAME_M ? toM : x)),
+  }));
+
+/** The study with one support of an option moved to a chainage, m. A place that an abutment or neighbour takes is kept off. */
+export function withPier(study: Study, option: AppraisedOption, index: number, chainageM: number): Study {
+  const kept = keptOf(study, option);
+  const places = placesOf(kept.units);
+  const [before, here, after] = [places[index - 1], places[index], places[index + 1]];
+  if (before === undefined || here === undefined || after === undefined) return study;
+  const to = Math.min(Math.max(chainageM, before + 1), after - 1);
+  return withKept(study, { ...kept, units: moved(kept.units, here, to) });
+}
+
+/** What comes of a span that was typed: the study, or why it cannot be had. */
+export type SpanTyped =
+  { readonly ok: true; readonly study: Study } | { readonly ok: false; readonly why: string };
+
+/**
+ * The study with a span of a given length, m: the support at its end moves, or the one at its start where that one is locked
+ * or an abutment; the next span takes up the difference.
+ */
+export function withSpan(study: Study, option: AppraisedOption, span: number, lengthM: number): SpanTyped {
+  const kept = keptOf(study, option);
+  const places = placesOf(kept.units);
+  const [fromM, toM] = [places[span]!, places[span + 1]!];
+  const last = places.length - 1;
+  const isFree = (index: number): boolean =>
+    index > 0 && index < last && kept.locked?.includes(index) !== true;
+  const end = isFree(span + 1) ? span + 1 : isFree(span) ? span : null;
+  if (end === null) {
+    const why =
+      places.length === 2
+        ? 'the crossing is one span; its ends are those of the brief'
+        : 'both its ends are held: unlock a pier first';
+    return { ok: false, why };
+  }
+  const target = end === span ? toM - lengthM : fromM + lengthM;
+  const neighbour = end === span ? places[span - 1]! : places[span + 2]!;
+  const most = Math.abs(neighbour - (end === span ? toM : fromM)) - 1;
+  if (!(lengthM >= 1 && lengthM <= most)) {
+    const other = supportName(end === span ? span - 1 : span + 2, places.length);
+    const [least, atMost] = [fixed(1, 1), fixed(most, 1)];
+    return { ok: false, why: `between ${least} and ${atMost} m, or the next span up to ${other} is gone` };
+  }
+  return {
+    ok: true,
+    study: withKept(study, { ...kept, units: moved(kept.units, places[end]!, target) }),
+  };
+}
+
+/** The study with the depth of an option typed, m; null leaves it to least cost again. */
+export const withDepth = (study: Study, option: AppraisedOption, depthM: number | null): Study =>
+  withKept(study, { ...keptOf(study, option), depthM });
+
+/** The study with a pier of an option locked or freed. */
+export function withLock(study: Study, option: AppraisedOption, index: number, isLocked: boolean): Study {
+  const { locked = [], ...kept } = keptOf(study, option);
+  const others = locked.filter((one) => one !== index);
+  const next = isLocked ? [...others, index].sort((a, b) => a - b) : others;
+  return withKept(study, { ...kept, ...(next.length > 0 && { locked: next }) });
+}
+
+/** The study with an option given back to the search, which finds its piers and depth anew. */
+export function released(study: Study, number: number): Study {
+  const { options } = study;
+  return {
+    ...study,
+    options: { ...options, kept: options.kept.filter((kept) => kept.number !== number) },
+  };
+}
+
+/** The study with an edge of an obstacle moved, m; an envelope that begins or ends with it goes along. */
+export function withObstacleEdge(study: Study, index: number, end: 'from' | 'to', chainageM: number): Study {
+  const obstacle = study.brief.obstacles[index];
+  if (obstacle === undefined) return study;
+  const key = end === 'from' ? 'fromM' : 'toM';
+  const { clearance } = obstacle;
+  const goesAlong = clearance !== null && Math.abs(clearance[key] - obstacle[key]) <= SAME_M;
+  return putAt(study, ['brief', 'obstacles', index], {
+    ...obstacle,
+    [key]: chainageM,
+    ...(goesAlong && { clearance: { ...clearance, [key]: chainageM } }),
+  });
+}
+
+/** What a handle of a drawing moves, in words for undo, and the study with it moved; null for a handle nobody knows. */
+export function handEdit(
+  key: string,
+  option: AppraisedOption | null,
+): { readonly what: string; readonly put: (study: Study, value: number) => Study } | null {
+  const [kind, first = '', second = ''] = key.split('/');
+  const index = Number(first);
+  if (kind === 'obstacle' && (second === 'from' || second === 'to')) {
+    return { what: 'edge of an obstacle', put: (study, at) => withObstacleEdge(study, index, second, at) };
+  }
+  if (kind === 'clearance') {
+    const path = ['brief', 'obstacles', index, 'clearance', 'headroomM'];
+    return { what: 'headroom', put: (study, value) => putAt(study, path, value) };
+  }
+  if (kind === 'road') {
+    const path = ['brief', 'road', first === 'start' ? 'startLevelM' : 'endLevelM'];
+    return { what: 'road level', put: (study, value) => putAt(study, path, value) };
+  }
+  if (option === null) return null;
+  if (kind === 'pier') {
+    return { what: 'moving a pier', put: (study, at) => withPier(study, option, index, at) };
+  }
+  if (kind === 'depth') return { what: 'depth', put: (study, value) => withDepth(study, option, value) };
+  if (kind === 'span') {
+    const put = (study: Study, value: number): Study => {
+      const typed = withSpan(study, option, index, value);
+      return typed.ok ? typed.study : study;
+    };
+    return { what: 'span', put };
+  }
+  return null;
+}

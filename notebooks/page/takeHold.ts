@@ -1,0 +1,235 @@
+import { h } from '../html.ts';
+import { draggable } from './dragging.ts';
+import { readFigure } from './figureText.ts';
+
+/** What the handles of a drawing do; keys are those of the handles. */
+export interface HandDesk {
+  /** Something is taken hold of at a value. */
+  readonly take: (key: string, value: number) => void;
+  /** It is moved: one step of undo until it is let go. */
+  readonly move: (key: string, value: number) => void;
+  /** A value was typed; says why it cannot be had, or null. */
+  readonly type: (key: string, value: number) => string | null;
+  /** What was moved stays. */
+  readonly letGo: () => void;
+  /** Back to where it was taken. */
+  readonly back: () => void;
+  /** The key for locking was pressed on it. */
+  readonly lock: (key: string) => void;
+}
+
+/** What a handle says of itself in its attributes. */
+interface Handle {
+  readonly element: SVGElement;
+  readonly key: string;
+  readonly value: number;
+  readonly least: number;
+  readonly most: number;
+  readonly places: number;
+  readonly across: number;
+  readonly down: number;
+  readonly isTyped: boolean;
+  readonly isLocked: boolean;
+}
+
+function handleAt(target: EventTarget | null): Handle | null {
+  const element = target instanceof Element ? target.closest<SVGElement>('[data-handle]') : null;
+  if (element === null) return null;
+  const figure = (name: string): number => Number(element.getAttribute(name));
+  return {
+    element,
+    key: element.getAttribute('data-handle')!,
+    value: figure('aria-valuenow'),
+    least: figure('aria-valuemin'),
+    most: figure('aria-valuemax'),
+    places: figure('data-places'),
+    across: figure('data-across'),
+    down: figure('data-down'),
+    isTyped: element.classList.contains('typed'),
+    isLocked: element.classList.contains('locked'),
+  };
+}
+
+/** Steps of a handle, m: chainages by the half metre, levels by five centimetres; Shift ten times as much, Alt a fifth. */
+const stepOf = ({ places }: Handle, { shift, alt }: { shift: boolean; alt: boolean }): number =>
+  (places > 1 ? 0.05 : 0.5) * (shift ? 10 : 1) * (alt ? 0.2 : 1);
+
+/** A pixel of a drawing at 1:1000 is a quarter of a metre: levels move by a quarter of what the pointer does, unless Shift is held. */
+const LEVEL_GEAR = 0.25;
+
+const within = (value: number, { least, most }: Handle): number => Math.min(Math.max(value, least), most);
+
+/** On a round figure: multiples of the step count from nought. */
+const rounded = (value: number, step: number): number => Number((Math.round(value / step) * step).toFixed(3));
+
+const stepKeys: Readonly<Record<string, number>> = {
+  ArrowUp: 1,
+  ArrowRight: 1,
+  ArrowDown: -1,
+  ArrowLeft: -1,
+  PageUp: 10,
+  PageDown: -10,
+};
+
+/**
+ * Makes the handles of the drawings in a part of the page answer: dragged with mouse or pen, stepped with the arrow keys,
+ * typed after Enter or a digit. Escape takes back, L locks. The handles may be drawn anew at any time; `root` stays.
+ * @returns where refusals are said, to be put into the page
+ */
+export function takeHold(root: Element, desk: HandDesk): HTMLElement {
+  const said = h('p', { class: 'refusal hand-said', role: 'status' });
+  const say = (words: string): void => void (said.textContent = words);
+  /** The go of the arrow keys: what is stepped, and where it has come to before the drawing has followed. */
+  let stepped: { readonly key: string; value: number } | null = null;
+  let dragged: Handle | null = null;
+  /** Where the present gear of the drag began. */
+  let anchor = { value: 0, dx: 0, dy: 0, isCoarse: false };
+
+  const endSteps = (): void => {
+    if (stepped === null) return;
+    stepped = null;
+    desk.letGo();
+  };
+
+  const isHeldFast = ({ isLocked }: Handle): boolean => {
+    say(isLocked ? 'Locked: press L to free it.' : '');
+    return isLocked;
+  };
+
+  const openText = (handle: Handle, first: string | null): void => {
+    endSteps();
+    const grip = handle.element.querySelector('.grip')!;
+    const at = (name: string): number => Number(grip.getAttribute(name));
+    const [x, y] = [at('x') + at('width') / 2, at('y') + at('height') / 2];
+    const space = 'http://www.w3.org/2000/svg';
+    const place = document.createElementNS(space, 'foreignObject');
+    for (const [name, value] of Object.entries({ x: x - 40, y: y - 12, width: 80, height: 24 }))
+      place.setAttribute(name, String(value));
+    const was = handle.value.toFixed(handle.places);
+    const box = h('input', {
+      class: 'typed-in',
+      inputmode: 'decimal',
+      'aria-label': handle.element.getAttribute('aria-label'),
+      value: first ?? was,
+    });
+    let isOpen = true;
+    const close = (hasFocus: boolean): void => {
+      if (!isOpen) return;
+      isOpen = false;
+      place.remove();
+      handle.element.classList.remove('held');
+      if (hasFocus) handle.element.focus();
+    };
+    const keep = (hasFocus: boolean): void => {
+      if (!isOpen) return;
+      if (box.value.trim() === was) return close(hasFocus);
+      const read = readFigure(box.value, { places: handle.places, unit: 'm' });
+      const why =
+        read.ok && read.value !== 'unknown'
+          ? desk.type(handle.key, read.value)
+          : read.ok
+            ? 'a figure is needed'
+            : read.why;
+      const name = handle.element.getAttribute('aria-label') ?? '';
+      say(why === null ? '' : `${name}: refused, ${why}. ${was} is kept.`);
+      close(hasFocus);
+    };
+    box.addEventListener('keydown', (event) => {
+      event.stopPropagation();
+      if (event.key === 'Enter') keep(true);
+      else if (event.key === 'Escape') close(true);
+      else return;
+      event.preventDefault();
+    });
+    box.addEventListener('blur', () => keep(false));
+    // What is under it is neither chosen nor asked nor dragged.
+    for (const type of ['click', 'pointerdown', 'focusout'])
+      box.addEventListener(type, (event) => event.stopPropagation());
+    place.append(box);
+    handle.element.append(place);
+    handle.element.classList.add('held');
+    box.focus();
+    if (first === null) box.select();
+  };
+
+  draggable(root, {
+    may(event) {
+      dragged = handleAt(event.target);
+      if (dragged === null) return false;
+      endSteps();
+      event.preventDefault();
+      return true;
+    },
+    start() {
+      if (dragged === null || dragged.isTyped || isHeldFast(dragged)) return;
+      dragged.element.focus({ preventScroll: true });
+      dragged.element.classList.add('held');
+      anchor = { value: dragged.value, dx: 0, dy: 0, isCoarse: false };
+      desk.take(dragged.key, dragged.value);
+    },
+    move({ dx, dy, shift, alt }) {
+      if (dragged === null || dragged.isTyped || dragged.isLocked) return;
+      const moved = (isCoarse: boolean): number =>
+        anchor.value +
+        (dx - anchor.dx) * dragged!.across +
+        (dy - anchor.dy) * dragged!.down * (isCoarse ? 1 : LEVEL_GEAR);
+      if (shift !== anchor.isCoarse) anchor = { value: moved(anchor.isCoarse), dx, dy, isCoarse: shift };
+      const step = stepOf(dragged, { shift: false, alt });
+      desk.move(dragged.key, within(rounded(moved(shift), step), dragged));
+    },
+    end() {
+      if (dragged === null || dragged.isTyped || dragged.isLocked) return;
+      dragged.element.classList.remove('held');
+      desk.letGo();
+    },
+    cancel() {
+      if (dragged === null || dragged.isTyped || dragged.isLocked) return;
+      dragged.element.classList.remove('held');
+      desk.back();
+    },
+    tap() {
+      if (dragged === null) return;
+      if (dragged.isTyped) openText(dragged, null);
+      else dragged.element.focus({ preventScroll: true });
+    },
+  });
+
+  root.addEventListener('keydown', (event) => {
+    const pressed = event as KeyboardEvent;
+    const { key, shiftKey, altKey, ctrlKey, metaKey } = pressed;
+    const handle = handleAt(event.target);
+    if (handle === null || ctrlKey || metaKey) return;
+    const direction = stepKeys[key];
+    if (direction !== undefined) {
+      if (!isHeldFast(handle)) {
+        if (stepped?.key !== handle.key) {
+          endSteps();
+          desk.take(handle.key, handle.value);
+          stepped = { key: handle.key, value: handle.value };
+        }
+        const by = direction * stepOf(handle, { shift: shiftKey, alt: altKey });
+        stepped.value = within(Number((stepped.value + by).toFixed(3)), handle);
+        desk.move(handle.key, stepped.value);
+      }
+    } else if (key === 'Escape') {
+      if (stepped === null) return;
+      stepped = null;
+      desk.back();
+    } else if (key === 'Enter') {
+      if (stepped !== null) endSteps();
+      else if (!isHeldFast(handle)) openText(handle, null);
+    } else if (/^[0-9]$/u.test(key)) {
+      if (!isHeldFast(handle)) openText(handle, key);
+    } else if (key === 'l' || key === 'L') {
+      endSteps();
+      say('');
+      desk.lock(handle.key);
+    } else return;
+    event.preventDefault();
+    event.stopPropagation();
+  });
+  root.addEventListener('focusout', (event) => {
+    if (stepped !== null && handleAt(event.target)?.key === stepped.key) endSteps();
+  });
+  return said;
+}

@@ -1,0 +1,238 @@
+import type { Page } from 'playwright-core';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import example from '../../data/examples/low-ferry.json' with { type: 'json' };
+import { openSite, type Heard, type Site } from './site.ts';
+
+let site: Site;
+let page: Page;
+let heard: Heard;
+
+const settled = async (): Promise<void> => {
+  await page.waitForFunction(
+    () => [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
+    undefined,
+    { timeout: 60_000 },
+  );
+};
+
+const CROSSING = '[id="1+020"]';
+const STACK = '[id="3+020"]';
+
+// One page for all: each test takes back what it has done.
+beforeAll(async () => {
+  site = await openSite();
+  ({ page, heard } = await site.open('option-study.html'));
+  await page.waitForSelector('[data-option]', { timeout: 60_000 });
+  await settled();
+});
+afterEach(async () => {
+  await page.mouse.up();
+  const undo = page.getByRole('button', { name: 'Undo', exact: true });
+  while (await undo.isEnabled()) await undo.click();
+  await settled();
+  expect(heard.console).toEqual([]);
+  expect(heard.elsewhere).toEqual([]);
+});
+afterAll(() => site.close());
+
+const handle = (key: string, cell = CROSSING) => page.locator(`${cell} [data-handle="${key}"]`);
+const valueOf = async (key: string, cell = CROSSING): Promise<number> =>
+  Number(await handle(key, cell).getAttribute('aria-valuenow'));
+const textOf = (selector: string): Promise<string> =>
+  page.locator(selector).evaluate((element) => element.textContent);
+const undoIs = (what: string): Promise<unknown> =>
+  page.waitForFunction(
+    (words) => [...document.querySelectorAll('button')].some(({ title }) => title === words),
+    what,
+  );
+
+/** Takes a handle with the mouse and moves it, without letting go. */
+async function pull(key: string, dx: number, dy: number, cell = CROSSING): Promise<void> {
+  const grip = handle(key, cell).locator('.grip');
+  await grip.scrollIntoViewIfNeeded();
+  const box = (await grip.boundingBox())!;
+  const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+  await page.mouse.move(x, y);
+  await page.mouse.down();
+  for (let step = 1; step <= 4; step += 1) await page.mouse.move(x + (dx * step) / 4, y + (dy * step) / 4);
+}
+
+const changed = (key: string, from: number, cell = CROSSING): Promise<unknown> =>
+  page.waitForFunction(
+    ([selector, was]) => document.querySelector(selector!)?.getAttribute('aria-valuenow') !== was,
+    [`${cell} [data-handle="${key}"]`, String(from)],
+  );
+
+describe.each([
+  ['the crossing', CROSSING, `${CROSSING} .notes`],
+  ['the stack', STACK, '[id="3+015"]'],
+])('a pier dragged in %s', (_, cell, said) => {
+  it('moves, shows its free stretch and the changed spans, costs follow, and it is one step of undo', async () => {
+    const before = await valueOf('pier/1', cell);
+    const price = await textOf(said);
+    await pull('pier/1', 24, 0, cell);
+    await changed('pier/1', before, cell);
+    await page.waitForSelector(`${cell} .free path`);
+    expect(await textOf(`${cell} svg`)).toMatch(/\(\+\d+\.\d\)/u);
+    await page.waitForFunction(
+      ([place, words]) => document.querySelector(place!)?.textContent !== words,
+      [said, price],
+    );
+    await page.mouse.up();
+    await settled();
+    const after = await valueOf('pier/1', cell);
+    expect(after).toBeGreaterThan(before + 3);
+    expect(await page.locator(`${cell} .free`).count()).toBe(0);
+    await undoIs('Undo moving a pier');
+    expect(await textOf('[id="3+010"]')).toContain('is kept by hand');
+    await page.getByRole('button', { name: 'Undo', exact: true }).click();
+    await settled();
+    expect(await valueOf('pier/1', cell)).toBe(before);
+    expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+  });
+});
+
+describe('by hand', () => {
+  it('Escape while a pier is dragged takes it back, and nothing is left to undo', async () => {
+    const before = await valueOf('pier/1');
+    await pull('pier/1', 20, 0);
+    await changed('pier/1', before);
+    await page.keyboard.press('Escape');
+    await page.mouse.up();
+    await settled();
+    expect(await valueOf('pier/1')).toBe(before);
+    expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+  });
+
+  it('a pier in the river is shown with the reason, and stays when it is let go', async () => {
+    const middle = await page.evaluate(() => {
+      const barred = document.querySelector('[id="1+020"] .barred path')!.getBoundingClientRect();
+      return barred.left + barred.width / 2;
+    });
+    const box = (await handle('pier/2').locator('.grip').boundingBox())!;
+    await pull('pier/2', middle - box.x - box.width / 2 - 30, 0);
+    await page.waitForFunction(() =>
+      document.querySelector('[id="1+020"] svg')?.textContent.includes('P2 may not stand here: River Wend'),
+    );
+    await page.mouse.up();
+    await settled();
+    expect(await textOf(`${CROSSING} svg`)).toContain('P2 may not stand here: River Wend');
+    expect(await textOf(`${CROSSING} .notes`)).toContain('Not as it stands.');
+    expect(await textOf(`${STACK} .row.reference`)).toContain('reference, out');
+  });
+
+  it('arrow keys step a pier, Shift by more, Escape takes the whole go back', async () => {
+    const before = await valueOf('pier/1');
+    await handle('pier/1').focus();
+    await page.keyboard.press('ArrowRight');
+    await page.keyboard.press('ArrowRight');
+    await page.waitForFunction(
+      ([selector, value]) => document.querySelector(selector!)?.getAttribute('aria-valuenow') === value,
+      [`${CROSSING} [data-handle="pier/1"]`, String(before + 1)],
+    );
+    await page.keyboard.press('Shift+ArrowLeft');
+    await page.waitForFunction(
+      ([selector, value]) => document.querySelector(selector!)?.getAttribute('aria-valuenow') === value,
+      [`${CROSSING} [data-handle="pier/1"]`, String(before - 4)],
+    );
+    await page.keyboard.press('Escape');
+    await settled();
+    expect(await valueOf('pier/1')).toBe(before);
+    expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+    expect(await page.evaluate(() => document.activeElement?.getAttribute('data-handle'))).toBe('pier/1');
+  });
+
+  it('a span is typed over in its dimension; one that cannot be is refused with the reason', async () => {
+    const before = await valueOf('span/0', STACK);
+    await handle('span/0', STACK).locator('.grip').click();
+    await page.keyboard.type(String(before + 2));
+    await page.keyboard.press('Enter');
+    await changed('span/0', before, STACK);
+    expect(await valueOf('span/0', STACK)).toBe(before + 2);
+    await settled();
+    await handle('span/0', STACK).locator('.grip').click();
+    await page.keyboard.type('900');
+    await page.keyboard.press('Enter');
+    await page.waitForFunction(() =>
+      document.querySelector('[id="3+020"] .hand-said')?.textContent.includes('refused, between'),
+    );
+    expect(await valueOf('span/0', STACK)).toBe(before + 2);
+  });
+
+  it('a locked pier is not moved, by mouse or keys, and is freed again', async () => {
+    const before = await valueOf('pier/1');
+    await page.getByRole('button', { name: 'Lock P1' }).click();
+    await page.waitForSelector(`${CROSSING} .handle.locked`);
+    await settled();
+    await pull('pier/1', 24, 0);
+    await page.mouse.up();
+    await handle('pier/1').focus();
+    await page.keyboard.press('ArrowRight');
+    await settled();
+    expect(await valueOf('pier/1')).toBe(before);
+    expect(await textOf(`${CROSSING} .hand-said`)).toContain('Locked');
+    await page.keyboard.press('l');
+    await page.waitForSelector(`${CROSSING} .handle.locked`, { state: 'detached' });
+    await settled();
+  });
+
+  it.each([
+    ['obstacle/1/to', 16, 0, '1+030'],
+    ['clearance/0', 0, -10, '1+030'],
+    ['road/start', 0, -10, '1+010'],
+  ])('%s is dragged, and the brief follows', async (key, dx, dy, station) => {
+    const before = await valueOf(key);
+    const brief = await textOf(`[id="${station}"] .body`);
+    await pull(key, dx, dy);
+    await changed(key, before);
+    await page.mouse.up();
+    await settled();
+    expect(await valueOf(key)).not.toBe(before);
+    expect(await textOf(`[id="${station}"] .body`)).not.toBe(brief);
+  });
+
+  it('a depth is dragged and held; the study can be left to find it again', async () => {
+    const before = await valueOf('depth');
+    await pull('depth', 0, 10);
+    await changed('depth', before);
+    await page.mouse.up();
+    await settled();
+    const after = await valueOf('depth');
+    expect(after).toBeGreaterThan(before + 0.2);
+    await page.getByRole('button', { name: 'Depth of least cost' }).click();
+    await changed('depth', after);
+    await settled();
+    expect(await valueOf('depth')).toBeCloseTo(before, 1);
+    await page.getByRole('button', { name: 'Give it back to the search' }).click();
+    await page.waitForFunction(() =>
+      document.querySelector('[id="3+010"]')?.textContent.includes('as the search proposed it'),
+    );
+  });
+
+  it('a form that a rule puts out is worked out anyway, and left out again', async () => {
+    const study = structuredClone(example) as { options: { forms: string[] } };
+    study.options.forms = ['composite-i', 'slab'];
+    const [chooser] = await Promise.all([
+      page.waitForEvent('filechooser'),
+      page.getByRole('button', { name: 'Open', exact: true }).click(),
+    ]);
+    const buffer = Buffer.from(JSON.stringify(study));
+    await chooser.setFiles({ name: 'study.json', mimeType: 'application/json', buffer });
+    await page.waitForFunction(() => document.querySelectorAll('[data-option]').length <= 3);
+    await settled();
+    await page.locator(`${STACK} details.behind summary`).click();
+    const ask = page.locator(`${STACK} button`, { hasText: 'work it out anyway' }).first();
+    const name = (await ask.getAttribute('aria-label'))!.split(':')[0]!;
+    await ask.click();
+    await page.waitForFunction(
+      (form) => document.querySelector('[id="3+020"]')?.textContent.includes(`${form} is worked out`),
+      name,
+    );
+    await settled();
+    await page.locator(`${STACK} button`, { hasText: 'leave it out again' }).first().click();
+    await page.waitForFunction(
+      (form) => !document.querySelector('[id="3+020"]')?.textContent.includes(`${form} is worked out`),
+      name,
+    );
+  });
+});

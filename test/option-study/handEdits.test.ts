@@ -1,0 +1,154 @@
+import { describe, expect, it } from 'vitest';
+import { appraise, appraiseKept, memory, readStudy, writeStudy, type Study } from '../../lib/index.ts';
+import {
+  handEdit,
+  keptOf,
+  released,
+  withDepth,
+  withLock,
+  withObstacleEdge,
+  withPier,
+  withSpan,
+} from '../../notebooks/option-study/handEdits.ts';
+import { workedStudy } from './study.ts';
+
+const lowFerry = workedStudy();
+const kept = memory();
+const only: Study = { ...lowFerry, options: { ...lowFerry.options, forms: ['composite-i'] } };
+const first = appraise(only, kept);
+const option = first.options[0]!;
+const numbered: Study = { ...only, options: { ...only.options, register: first.register } };
+const placesOf = (study: Study): number[] => [
+  ...new Set(keptOf(study, option).units.flatMap((u) => u.supportsM)),
+];
+const start = placesOf(numbered);
+
+describe('withPier(study, option, index, chainageM)', () => {
+  it('keeps the option under its number with the pier moved, as the reference, and moves it again', () => {
+    const once = withPier(numbered, option, 1, start[1]! + 3);
+    const twice = withPier(once, option, 1, start[1]! + 5);
+    expect(twice.options.kept).toHaveLength(1);
+    expect(twice.options.kept[0]!.number).toBe(option.number);
+    expect(twice.options.reference).toBe(option.number);
+    expect(placesOf(twice)).toEqual(start.map((at, i) => (i === 1 ? at + 5 : at)));
+  });
+
+  it('moves no abutment and keeps a metre off the neighbours', () => {
+    expect(withPier(numbered, option, 0, 0)).toBe(numbered);
+    expect(placesOf(withPier(numbered, option, 1, 1e6))[1]).toBe(start[2]! - 1);
+  });
+
+  it('gives a study that is read back as it was written', () => {
+    const study = withLock(
+      withDepth(withPier(numbered, option, 1, start[1]! + 3), option, 2.4),
+      option,
+      1,
+      true,
+    );
+    const read = readStudy(writeStudy(study));
+    expect(read.ok && read.value.options.kept).toEqual(study.options.kept);
+  });
+
+  it('is worked out under its number, and gives back the proposal when it is released', () => {
+    const moved = withPier(numbered, option, 1, start[1]! + 3);
+    const answer = appraise(moved, kept);
+    const mine = answer.options.find(({ number }) => number === option.number)!;
+    expect(mine.supports[1]!.chainageM).toBe(start[1]! + 3);
+    expect(answer.options.map(({ number }) => number).sort()).toEqual(
+      first.options.map(({ number }) => number).sort(),
+    );
+    const back = appraise(released(moved, option.number), kept);
+    expect(back.options.find(({ number }) => number === option.number)!.units).toEqual(option.units);
+  });
+
+  it('a pier in a barred stretch is kept, with the reason, and put out by the rules', () => {
+    const { fromM, toM } = first.site.mainOpening!;
+    const index = start.findIndex((at) => at > fromM - 5 && at < toM + 5);
+    const study = withPier(numbered, option, index, (fromM + toM) / 2);
+    expect(appraiseKept(study, option, kept).faults).toContain('support in a barred stretch: River Wend');
+    const mine = appraise(study, kept).options.find(({ number }) => number === option.number)!;
+    expect(mine.status).toBe('out');
+    expect(mine.rulings.find(({ rule }) => rule === 'support-barred')?.effect).toBe('out');
+  });
+
+  it('an option the brief has left a pier outside of is said to be dropped, and the others are worked out', () => {
+    const study = withPier(numbered, option, 1, start[1]! + 3);
+    const { crossing } = study.brief;
+    const shorter: Study = {
+      ...study,
+      brief: { ...study.brief, crossing: { ...crossing, startM: start[1]! + 4 } },
+    };
+    const answer = appraise(shorter, kept);
+    expect(answer.dropped.find((one) => one.option === option.number)?.because).toEqual([
+      'a support would stand beyond an abutment',
+    ]);
+    expect(answer.options.map(({ number }) => number)).not.toContain(option.number);
+    expect(answer.register.map(({ number }) => number)).toContain(option.number);
+  });
+});
+
+describe('withSpan(study, option, span, lengthM)', () => {
+  const spansOf = (study: Study): number[] =>
+    placesOf(study)
+      .slice(1)
+      .map((at, i) => at - placesOf(study)[i]!);
+  const spans = spansOf(numbered);
+
+  it('moves the support at its end; the next span takes up the difference', () => {
+    const typed = withSpan(numbered, option, 1, spans[1]! + 4);
+    expect(typed.ok && spansOf(typed.study)).toEqual(
+      spans.map((span, i) => (i === 1 ? span + 4 : i === 2 ? span - 4 : span)),
+    );
+  });
+
+  it('moves the support at its start where that at its end is an abutment or locked', () => {
+    const last = spans.length - 1;
+    const end = withSpan(numbered, option, last, spans[last]! + 2);
+    expect(end.ok && spansOf(end.study).slice(-2)).toEqual([spans[last - 1]! - 2, spans[last]! + 2]);
+    const locked = withSpan(withLock(numbered, option, 2, true), option, 1, spans[1]! + 2);
+    expect(locked.ok && spansOf(locked.study).slice(0, 3)).toEqual([spans[0]! - 2, spans[1]! + 2, spans[2]]);
+  });
+
+  it('is refused with the reason where both ends are held or the next span would be gone', () => {
+    const both = withLock(withLock(numbered, option, 1, true), option, 2, true);
+    expect(withSpan(both, option, 1, 40)).toMatchObject({
+      ok: false,
+      why: expect.stringContaining('unlock'),
+    });
+    expect(withSpan(numbered, option, 1, 1000)).toMatchObject({
+      ok: false,
+      why: expect.stringContaining('next span'),
+    });
+    expect(withSpan(numbered, option, 1, NaN).ok).toBe(false);
+  });
+});
+
+describe('handEdit(key, option)', () => {
+  it('moves edges, headroom and road levels of the brief', () => {
+    const put = (key: string, value: number): Study => handEdit(key, option)!.put(numbered, value);
+    expect(put('road/start', 21.3).brief.road.startLevelM).toBe(21.3);
+    expect(put('road/end', 18.1).brief.road.endLevelM).toBe(18.1);
+    const index = numbered.brief.obstacles.findIndex(({ clearance }) => clearance !== null);
+    expect(put(`clearance/${index}`, 6.2).brief.obstacles[index]!.clearance!.headroomM).toBe(6.2);
+    expect(put(`obstacle/${index}/to`, 1290).brief.obstacles[index]!.toM).toBe(1290);
+    expect(handEdit('somewhere/1', option)).toBeNull();
+    expect(handEdit('pier/1', null)).toBeNull();
+  });
+
+  it('withObstacleEdge(...) takes along an envelope that ends there and leaves another alone', () => {
+    const obstacles = numbered.brief.obstacles.map((one) =>
+      one.clearance === null
+        ? one
+        : { ...one, clearance: { ...one.clearance, toM: one.toM, fromM: one.fromM + 1 } },
+    );
+    const study: Study = { ...numbered, brief: { ...numbered.brief, obstacles } };
+    const index = obstacles.findIndex(({ clearance }) => clearance !== null);
+    const { fromM, toM } = obstacles[index]!;
+    expect(withObstacleEdge(study, index, 'to', toM + 2).brief.obstacles[index]!.clearance!.toM).toBe(
+      toM + 2,
+    );
+    expect(withObstacleEdge(study, index, 'from', fromM - 2).brief.obstacles[index]!.clearance!.fromM).toBe(
+      fromM + 1,
+    );
+  });
+});
