@@ -218,7 +218,9 @@ describe('by hand', () => {
     ]);
     const buffer = Buffer.from(JSON.stringify(study));
     await chooser.setFiles({ name: 'study.json', mimeType: 'application/json', buffer });
-    await page.waitForFunction(() => document.querySelectorAll('[data-option]').length <= 3);
+    await page.waitForFunction(() =>
+      document.querySelector('[id="3+020"] details.behind')?.textContent.includes('work it out anyway'),
+    );
     await settled();
     await page.locator(`${STACK} details.behind summary`).click();
     const ask = page.locator(`${STACK} button`, { hasText: 'work it out anyway' }).first();
