@@ -113,11 +113,11 @@ describe('withSpan(study, option, span, lengthM)', () => {
     const both = withLock(withLock(numbered, option, 1, true), option, 2, true);
     expect(withSpan(both, option, 1, 40)).toMatchObject({
       ok: false,
-      why: expect.stringContaining('unlock'),
+      why: expect.stringContaining('unlock') as string,
     });
     expect(withSpan(numbered, option, 1, 1000)).toMatchObject({
       ok: false,
-      why: expect.stringContaining('next span'),
+      why: expect.stringContaining('next span') as string,
     });
     expect(withSpan(numbered, option, 1, NaN).ok).toBe(false);
   });
