@@ -85,6 +85,9 @@ function patch(element: Element, { piece: before, nodes, own }: Made, next: Piec
   made.set(element, { piece: next, nodes: fresh, own });
 }
 
+/** The piece that an element made by `toDom` shows; undefined for other elements. */
+export const pieceOf = (element: Element): Piece | undefined => made.get(element)?.piece;
+
 /** Whether an element was made by `toDom` from a piece of the same kind, so that it can be redrawn. */
 export function isDrawingOf(element: Element, next: Piece): boolean {
   const piece = made.get(element)?.piece;

@@ -4,14 +4,20 @@ import { h } from '../html.ts';
 import {
   deviceCupboard,
   fileName,
+  isOf,
+  journal,
+  keeping,
   openFile,
   pagesFrom,
+  readOnly,
   saveFile,
   savedWords,
   sheet,
   studyShelf,
   studyStore,
   undoKeys,
+  type Journal,
+  type Keeping,
   type StudyShelf,
 } from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
@@ -41,36 +47,46 @@ function worked(): Study {
   return parsed.value;
 }
 
-/** The study named in the address, or the worked example under its own id. */
-async function opened(
-  shelf: StudyShelf | null,
-): Promise<{ id: string; study: Study; revision: number; problem: string }> {
+/** A study as a page begins with it. */
+interface Opened {
+  readonly id: string;
+  readonly study: Study;
+  readonly revision: number;
+  readonly problem: string;
+  /** What was changed last time had not been saved when the page was closed. */
+  readonly isUnsaved: boolean;
+}
+
+/** The study named in the address with what had not been saved of it, or the worked example under its own id. */
+async function opened(shelf: StudyShelf | null, waiting: Journal): Promise<Opened> {
   const id = new URLSearchParams(location.search).get('study');
-  if (id === null || shelf === null)
-    return { id: id ?? crypto.randomUUID(), study: worked(), revision: 0, problem: '' };
+  const anew = { id: crypto.randomUUID(), study: worked(), revision: 0, problem: '', isUnsaved: false };
+  if (id === null || shelf === null) return { ...anew, ...(id !== null && { id }) };
   const loaded = await shelf.load(id);
-  if (loaded.ok) return { id, ...loaded.value, problem: '' };
+  const unsaved = waiting.get(id);
+  const revision = loaded.ok ? loaded.value.revision : 0;
+  if (unsaved !== undefined && isOf(unsaved, revision)) {
+    const read = readStudy(unsaved.text);
+    if (read.ok) return { ...anew, id, study: read.value, revision, isUnsaved: true };
+  }
+  if (loaded.ok) return { ...anew, id, ...loaded.value };
   return {
-    id: crypto.randomUUID(),
-    study: worked(),
-    revision: 0,
+    ...anew,
     problem: `The study asked for was not opened: ${loaded.problems.map(sentence).join(' ')} The worked example is shown instead.`,
   };
 }
-
-/** Wait after the last change before it is saved, ms. */
-const SAVE_AFTER_MS = 600;
 
 async function start(): Promise<void> {
   // They load while the page looks for its study.
   const workers = appraiser();
   const cupboard = await deviceCupboard().catch(() => null);
   const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
-  const { study, problem, ...place } = await opened(shelf);
-  let { id, revision } = place;
+  const unsaved = journal(localStorage);
+  const { study, problem, id, revision, isUnsaved } = await opened(shelf, unsaved);
+  let kept: Keeping | null = null;
 
   const graph = newGraph();
-  const store = studyStore(graph, study, check);
+  const store = studyStore(graph, study, check, () => kept?.mayChange() ?? true);
   const cells = studyCells(graph, store, workers);
   const page = sheet(graph);
 
@@ -90,8 +106,7 @@ async function start(): Promise<void> {
       return;
     }
     // A study from a file is another study: it never takes the place of the one that was on the page.
-    id = crypto.randomUUID();
-    revision = 0;
+    kept?.startAnew(crypto.randomUUID());
     store.open(read.value);
   };
   const undo = button('Undo', store.undo);
@@ -156,18 +171,34 @@ async function start(): Promise<void> {
   studyWhereFrom(graph, cells, element);
   document.title = `${study.title} · Spanledger`;
 
-  let timer: ReturnType<typeof setTimeout> | undefined;
-  const save = async (): Promise<void> => {
-    if (shelf === null) return;
-    const result = await shelf.save(id, whole(), revision);
-    if (!result.ok) {
-      saved.textContent = result.problems.map(sentence).join(' ');
-      return;
-    }
-    revision = result.value.revision;
-    saved.textContent = savedWords(result.value.savedAt);
-    history.replaceState(null, '', `?study=${encodeURIComponent(id)}`);
+  const setReadOnly = readOnly(element);
+  const address = (): void => {
+    if (kept !== null) history.replaceState(null, '', `?study=${encodeURIComponent(kept.id())}`);
   };
+  if (shelf !== null) {
+    kept = keeping({
+      id,
+      revision,
+      shelf,
+      journal: unsaved,
+      format: { readStudy, writeStudy },
+      locks: navigator.locks,
+      study: whole,
+      show: store.open,
+      saved: (savedAt) => (saved.textContent = savedWords(savedAt)),
+      refused: (problems) => (saved.textContent = problems.map(sentence).join(' ')),
+      owned(isMine) {
+        setReadOnly(!isMine);
+        if (isMine) saved.replaceChildren(problem);
+        else
+          saved.replaceChildren(
+            'Read only: another tab has this study open. ',
+            button('Work on it here', () => kept?.takeOver()),
+          );
+      },
+    });
+    if (isUnsaved) kept.changed();
+  }
   let first = true;
   graph.watch(store.draft, (state) => {
     if (state.state !== 'ready') return;
@@ -176,8 +207,8 @@ async function start(): Promise<void> {
       first = false;
       return;
     }
-    clearTimeout(timer);
-    timer = setTimeout(() => void save(), SAVE_AFTER_MS);
+    kept?.changed();
+    address();
   });
 }
 

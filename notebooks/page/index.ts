@@ -39,4 +39,7 @@ export {
   type StudyShelf,
 } from './saving.ts';
 export { deviceCupboard } from './cupboard.ts';
+export { isOf, journal, type Journal, type Unsaved } from './journal.ts';
+export { keeping, type Keeping, type KeepingSpec } from './keeping.ts';
+export { readOnly } from './readOnly.ts';
 export { openFile, saveFile, textOf } from './files.ts';

@@ -6,6 +6,7 @@ import { cellHost } from './cellHost.ts';
 import { exchange } from './exchange.ts';
 import { frames } from './frames.ts';
 import { lateness } from './lateness.ts';
+import { drawingActions } from './drawingFile.ts';
 import { saveTables } from './tableFile.ts';
 import type { LineSection } from './stationLines.ts';
 import { stationLines } from './stationLines.ts';
@@ -196,6 +197,9 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
         ...sections.map((section) => section.element),
         lines.upright,
       );
+      const heading = (): string => element.querySelector('h1')?.textContent ?? '';
+      for (const { element: cell } of hosts())
+        cell.querySelector(':scope > .body')?.after(drawingActions(cell, heading));
       root.append(element);
       for (const host of hosts()) {
         host.begin();

@@ -70,12 +70,14 @@ const headOf = ({ format, version, title, reference, notice }: Study): Head => (
  * everything. Its inputs are named 'head', 'brief', 'books', 'options', 'priorities', 'notes', 'decision', 'draft',
  * 'problems' and 'history', and are defined here, so it comes before the cells of the page.
  * @param check what is wrong with a study; nothing when it is valid
+ * @param mayChange whether the study may be changed here; while it may not, edits, undo and redo do nothing
  * @throws when the study it starts with is not valid
  */
 export function studyStore(
   graph: Graph,
   study: Study,
   check: (study: Study) => readonly Problem[],
+  mayChange: () => boolean = () => true,
 ): StudyStore {
   const checkOpening = (opened: Study): void => {
     const [first] = check(opened);
@@ -152,6 +154,7 @@ export function studyStore(
     ...inputs,
 
     edit(change, { coalesce, what = 'last change' } = {}) {
+      if (!mayChange()) return;
       const last = done.at(-1);
       const joins = isOpen && coalesce !== undefined && last?.key === coalesce;
       if (!joins) endStep();
@@ -177,6 +180,7 @@ export function studyStore(
     },
 
     undo() {
+      if (!mayChange()) return;
       endStep();
       const step = done.pop();
       if (step === undefined) return;
@@ -185,6 +189,7 @@ export function studyStore(
     },
 
     redo() {
+      if (!mayChange()) return;
       endStep();
       const step = undone.pop();
       if (step === undefined) return;

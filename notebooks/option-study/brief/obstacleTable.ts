@@ -6,6 +6,7 @@ import { obstacleKindChoices, supportChoices } from './briefChoices.ts';
 import { clearanceState, withClearanceState, type ClearanceState } from './clearanceState.ts';
 import { fieldRow, focusField, listAction } from './fieldTable.ts';
 import { withEntry, withoutEntry } from './listEdits.ts';
+import { pastedObstacles } from './pastedObstacles.ts';
 import { problemBeside } from './problemBeside.ts';
 
 const list: Path = ['brief', 'obstacles'];
@@ -84,6 +85,44 @@ function row(fields: Fields, store: StudyStore, obstacle: Obstacle, index: numbe
   return fieldRow(cells);
 }
 
+/** What a paste of obstacles did or why it was refused, said below the table; and the box it may be pasted into. */
+function pasting(store: StudyStore): { readonly box: HTMLElement; readonly take: (text: string) => void } {
+  const said = h('p', { class: 'pasted', role: 'status' });
+  const field = h('textarea', {
+    class: 'fig paste',
+    rows: 1,
+    'aria-label': 'paste obstacles: name, kind, from, to, supports, envelope from, to, above level, clear',
+    placeholder: 'paste rows here',
+    'data-key': 'paste.obstacles',
+    spellcheck: 'false',
+  });
+  const take = (text: string): void => {
+    const before = store.valid().brief.obstacles;
+    const read = pastedObstacles(text);
+    said.classList.toggle('refusal', !read.ok);
+    if (!read.ok) {
+      said.replaceChildren(`Nothing taken: ${read.why}. The ${before.length} obstacles stay as they are.`);
+      return;
+    }
+    store.edit((study) => putAt(study, list, read.obstacles), { what: 'pasting obstacles' });
+    const takeBack = (): void => {
+      store.edit((study) => putAt(study, list, before), { what: 'taking back pasted obstacles' });
+      said.replaceChildren();
+    };
+    const words = [`${read.obstacles.length} obstacles taken in place of ${before.length}`, ...read.remarks];
+    said.replaceChildren(
+      `${words.join('; ')}. `,
+      h('button', { type: 'button', class: 'action', onclick: takeBack }, 'Take them back'),
+    );
+  };
+  field.addEventListener('change', () => {
+    const text = field.value;
+    field.value = '';
+    if (text.trim() !== '') take(text);
+  });
+  return { box: h('div', {}, h('p', { class: 'list-actions' }, field), said), take };
+}
+
 /** The obstacles of the crossing in a table: where each lies, whether supports may stand there, what must stay clear. */
 export function obstacleTable(graph: Graph, store: StudyStore): HTMLElement {
   const { element } = standing(graph, store, {
@@ -128,5 +167,19 @@ export function obstacleTable(graph: Graph, store: StudyStore): HTMLElement {
       ),
     ],
   });
-  return element;
+  const { box, take } = pasting(store);
+  const whole = h('div', {}, element, box);
+  whole.addEventListener(
+    'paste',
+    (event) => {
+      const text = event.clipboardData?.getData('text/plain') ?? '';
+      // A name or a single figure is pasted into its field; rows of columns are obstacles.
+      if (!/[\t;]/u.test(text.trim())) return;
+      event.preventDefault();
+      event.stopPropagation();
+      take(text);
+    },
+    true,
+  );
+  return whole;
 }

@@ -1,0 +1,140 @@
+import type { Problem, Study } from '../../lib/index.ts';
+import { isOf, type Journal } from './journal.ts';
+import { ownership, type Ownership } from './ownership.ts';
+import type { StudyFormat, StudyShelf } from './saving.ts';
+
+/** The study of a page as it is kept on the device: saved as it is typed, and changed by one tab at a time. */
+export interface Keeping {
+  readonly id: () => string;
+  /** Whether this tab may change the study. */
+  readonly mayChange: () => boolean;
+  /** Something has changed: it is written down at once and saved soon. */
+  readonly changed: () => void;
+  /** The page now shows another study, which is not on the device yet. */
+  readonly startAnew: (id: string) => void;
+  readonly takeOver: () => void;
+}
+
+export interface KeepingSpec {
+  readonly id: string;
+  readonly revision: number;
+  readonly shelf: StudyShelf;
+  readonly journal: Journal;
+  readonly format: StudyFormat;
+  readonly locks: LockManager | undefined;
+  /** The study as it is to be saved. */
+  readonly study: () => Study;
+  /** Shows a study that another tab has changed meanwhile. */
+  readonly show: (study: Study) => void;
+  readonly saved: (savedAt: string) => void;
+  readonly refused: (problems: readonly Problem[]) => void;
+  /** Says whether this tab may change the study. */
+  readonly owned: (isMine: boolean) => void;
+}
+
+/** Wait after the last change before it is saved, ms; and the longest a change waits to be written down. */
+const SAVE_AFTER_MS = 600;
+const WRITE_AFTER_MS = 80;
+/** What a tab that gives a study up takes to write down what it has not saved, ms. */
+const HAND_OVER_MS = 200;
+
+/** Keeps the study of a page. Writes what waits when the page is hidden or closed. */
+export function keeping(spec: KeepingSpec): Keeping {
+  const { shelf, journal, format } = spec;
+  let { id, revision } = spec;
+  let own: Ownership;
+  let saving: ReturnType<typeof setTimeout> | undefined;
+  let writing: ReturnType<typeof setTimeout> | undefined;
+  let isDirty = false;
+  let mayChange = false;
+  let last: Promise<void> = Promise.resolve();
+
+  const hasChanged = (): boolean => isDirty;
+
+  const write = (): void => {
+    clearTimeout(writing);
+    writing = undefined;
+    if (isDirty) journal.put(id, { text: format.writeStudy(spec.study()), revision });
+  };
+  const saveNow = async (): Promise<void> => {
+    clearTimeout(saving);
+    if (!isDirty || !own.isMine()) return;
+    isDirty = false;
+    const mine = id;
+    const result = await shelf.save(mine, spec.study(), revision);
+    if (mine !== id) return;
+    if (!result.ok) {
+      isDirty = true;
+      spec.refused(result.problems);
+      return;
+    }
+    revision = result.value.revision;
+    // What has changed while it was saved starts from this revision.
+    if (hasChanged()) write();
+    else journal.clear(mine);
+    spec.saved(result.value.savedAt);
+  };
+  /** One saving after the other. */
+  const save = (): Promise<void> => (last = last.then(saveNow));
+
+  const allow = (may: boolean): void => {
+    mayChange = may;
+    spec.owned(may);
+  };
+
+  /** What the tab that had the study has left. */
+  const takeUp = async (): Promise<void> => {
+    const waits = journal.get(id);
+    const loaded = await shelf.load(id);
+    if (loaded.ok) revision = loaded.value.revision;
+    const unsaved = waits !== undefined && isOf(waits, revision) ? format.readStudy(waits.text) : null;
+    if (unsaved?.ok === true) {
+      spec.show(unsaved.value);
+      isDirty = true;
+      void save();
+    } else if (loaded.ok) spec.show(loaded.value.study);
+  };
+  const claim = (): void => {
+    own = ownership(spec.locks, id, (how) => {
+      if (how === 'first') return allow(true);
+      allow(false);
+      if (how === 'elsewhere') {
+        // For the tab that has taken it over.
+        write();
+        isDirty = false;
+        clearTimeout(saving);
+      } else {
+        setTimeout(() => void takeUp().then(() => allow(own.isMine())), HAND_OVER_MS);
+      }
+    });
+  };
+  claim();
+
+  const leave = (): void => {
+    if (own.isMine()) write();
+    void save();
+  };
+  addEventListener('pagehide', leave);
+  document.addEventListener('visibilitychange', () => {
+    if (document.visibilityState === 'hidden') leave();
+  });
+
+  return {
+    id: () => id,
+    mayChange: () => mayChange,
+    changed() {
+      isDirty = true;
+      writing ??= setTimeout(write, WRITE_AFTER_MS);
+      clearTimeout(saving);
+      saving = setTimeout(() => void save(), SAVE_AFTER_MS);
+    },
+    startAnew(next) {
+      own.end();
+      id = next;
+      revision = 0;
+      isDirty = false;
+      claim();
+    },
+    takeOver: () => own.takeOver(),
+  };
+}

@@ -1,0 +1,172 @@
+import type { Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { openSite, type Heard, type Site } from './site.ts';
+
+let site: Site;
+let page: Page;
+let heard: Heard;
+
+beforeAll(async () => {
+  site = await openSite();
+  ({ page, heard } = await site.open('option-study.html'));
+  await standing(page);
+});
+afterAll(() => site.close());
+
+async function standing(of: Page): Promise<void> {
+  await of.waitForSelector('[id="1+020"] [data-handle="pier/1"]', { state: 'attached', timeout: 60_000 });
+}
+const field = (of: Page, name: string) => of.locator(`[role=spinbutton][aria-label^="${name},"]`).first();
+const shown = async (of: Page, name: string): Promise<string | null> => field(of, name).textContent();
+async function type(of: Page, name: string, value: string): Promise<void> {
+  await field(of, name).focus();
+  await of.keyboard.press('Control+a');
+  await of.keyboard.type(value);
+  await of.keyboard.press('Enter');
+}
+const bar = (of: Page): Promise<string | null> => of.locator('.bar .state').textContent();
+const says = (of: Page, words: string): Promise<unknown> =>
+  of.waitForFunction((text) => document.querySelector('.bar .state')?.textContent.includes(text), words, {
+    polling: 100,
+  });
+/** Waits until every change has been saved. */
+const allSaved = (of: Page): Promise<unknown> =>
+  of.waitForFunction(() => Object.keys(localStorage).length === 0, undefined, { polling: 100 });
+/** Waits until the page may be changed. */
+const mayChange = (of: Page): Promise<unknown> =>
+  of.waitForFunction(() => !document.querySelector('.sheet')!.classList.contains('read-only'), undefined, {
+    polling: 100,
+  });
+
+describe('a study on the device', () => {
+  it('is not lost when the page is loaded again at once after a change, before it has been saved', async () => {
+    await type(page, 'no-pier width', '64');
+    await page.reload();
+    await standing(page);
+    expect(await shown(page, 'no-pier width')).toBe('64.0');
+    await says(page, 'saved');
+  });
+
+  it('is not lost when the tab is killed while a pier is in hand', async () => {
+    const grip = page.locator('[id="1+020"] [data-handle="pier/1"] .grip');
+    await grip.scrollIntoViewIfNeeded();
+    const box = (await grip.boundingBox())!;
+    await page.mouse.move(box.x + 13, box.y + 13);
+    await page.mouse.down();
+    await page.mouse.move(box.x + 33, box.y + 13, { steps: 4 });
+    const value = (): Promise<string | null> =>
+      page.locator('[id="1+020"] [data-handle="pier/1"]').getAttribute('aria-valuenow');
+    await page.waitForTimeout(400);
+    const [dragged, address] = [await value(), page.url()];
+    const context = page.context();
+    const killer = await context.newCDPSession(page);
+    void killer.send('Page.crash').catch(() => undefined);
+    await page.waitForEvent('crash');
+    await page.close();
+    page = await context.newPage();
+    page.on('console', (message) => heard.console.push(message.text()));
+    await page.goto(address);
+    await standing(page);
+    await page.waitForFunction(() =>
+      document.querySelector('[id="3+010"]')?.textContent.includes('kept by hand'),
+    );
+    expect(await value()).toBe(dragged);
+    await allSaved(page);
+  });
+
+  it('is read only in a second tab, which says so, and can be taken over', async () => {
+    const second = await page.context().newPage();
+    second.on('console', (message) => heard.console.push(message.text()));
+    await second.goto(page.url());
+    await standing(second);
+    await says(second, 'Read only: another tab has this study open.');
+    const before = await shown(second, 'no-pier width');
+    await type(second, 'no-pier width', '90');
+    expect(await shown(second, 'no-pier width')).toBe(before);
+    // What the first tab changes last is there when the second takes over.
+    await page.bringToFront();
+    await type(page, 'no-pier width', '66');
+    await second.bringToFront();
+    await second.getByRole('button', { name: 'Work on it here' }).click();
+    await says(page, 'Read only');
+    await mayChange(second);
+    expect(await shown(second, 'no-pier width')).toBe('66.0');
+    await type(second, 'no-pier width', '67');
+    await says(second, 'saved');
+    // The first may go on once the second is closed, from where that has left it.
+    await allSaved(second);
+    await second.close();
+    await page.bringToFront();
+    await mayChange(page);
+    expect(await shown(page, 'no-pier width')).toBe('67.0');
+    expect(await bar(page)).not.toContain('Read only');
+    expect(heard.console).toEqual([]);
+  });
+});
+
+describe('a drawing', () => {
+  it('is saved as SVG in true size, without its handles', async () => {
+    const cell = page.locator('[id="1+020"]');
+    await cell.scrollIntoViewIfNeeded();
+    const [download] = await Promise.all([
+      page.waitForEvent('download'),
+      cell.getByRole('button', { name: /^Save the drawing/u }).click(),
+    ]);
+    expect(download.suggestedFilename()).toBe('1-020-crossing.svg');
+    let text = '';
+    for await (const piece of await download.createReadStream()) text += String(piece);
+    const scale = Number(/data-scale="(\d+)"/u.exec(text)![1]);
+    const [, widthMm, , widthPx] = /width="([\d.]+)mm" height="([\d.]+)mm" viewBox="0 0 ([\d.]+)/u.exec(
+      text,
+    )!;
+    // One pixel of the drawing is 1/96 inch on paper, at the scale it says.
+    expect(Number(widthMm)).toBeCloseTo((Number(widthPx) * 25.4) / 96, 2);
+    expect(scale).toBe(1000);
+    expect(text).not.toContain('data-handle');
+    expect(text).toContain('1:1000 at A3');
+  });
+
+  it('is printed alone, on A4 at its scale and on Letter too; a stack is cut between its rows', async () => {
+    await page.evaluate(() => {
+      Object.assign(window, { printed: [] as unknown[] });
+      window.print = () => {
+        const parts = [...document.querySelectorAll('.alone-sheet')].map((sheet) => ({
+          words: sheet.querySelector('p')!.textContent,
+          width: Number(sheet.querySelector('svg')!.getAttribute('width')),
+          height: Number(sheet.querySelector('svg')!.getAttribute('height')),
+        }));
+        (window as unknown as { printed: unknown[] }).printed.push(parts);
+        dispatchEvent(new Event('afterprint'));
+      };
+    });
+    await page
+      .locator('[id="1+020"]')
+      .getByRole('button', { name: /on A4$/u })
+      .click();
+    await page
+      .locator('[id="1+020"]')
+      .getByRole('button', { name: /on Letter$/u })
+      .click();
+    await page
+      .locator('[id="3+020"]')
+      .getByRole('button', { name: /on A4$/u })
+      .click();
+    const printed = await page.evaluate(
+      () =>
+        (
+          window as unknown as {
+            printed: { words: string; width: number; height: number }[][];
+          }
+        ).printed,
+    );
+    expect(printed[0]).toHaveLength(1);
+    expect(printed[0]![0]!.words).toContain('1:1000 on A4; the scale bar rules.');
+    // Across the sheet with 10 mm free on both sides.
+    expect(printed[0]![0]!.width).toBeLessThanOrEqual(((297 - 20) / 25.4) * 96);
+    expect(printed[1]![0]!.width).toBeLessThanOrEqual(((279.4 - 20) / 25.4) * 96);
+    expect(printed[2]!.length).toBeGreaterThan(1);
+    expect(printed[2]![0]!.words).toMatch(/part 1 of \d; about 1:\d+ on A4, reduced from 1:1000/u);
+    for (const { height } of printed[2]!) expect(height).toBeLessThanOrEqual(((210 - 24) / 25.4) * 96 - 40);
+    expect(await page.locator('.alone-print').count()).toBe(0);
+  });
+});
