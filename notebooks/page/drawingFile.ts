@@ -47,8 +47,12 @@ function saveDrawings(cell: Element): void {
   });
 }
 
-const action = (words: string, name: string, act: () => void): HTMLElement =>
-  h('button', { type: 'button', class: 'action', 'aria-label': name, onclick: act }, words);
+const action = (words: string, of: string, act: () => void): HTMLElement =>
+  h(
+    'button',
+    { type: 'button', class: 'action', 'aria-label': `${words}: drawing of ${of}`, onclick: act },
+    words,
+  );
 
 /**
  * The line under a cell with drawings: saves them as SVG in true size, or prints them alone on A4 or Letter. Hidden while
@@ -63,8 +67,8 @@ export function drawingActions(cell: HTMLElement, heading: () => string): HTMLEl
     'p',
     { class: 'drawing-actions' },
     'Drawing: ',
-    action('save as SVG', `Save the drawing of ${of} as SVG`, () => saveDrawings(cell)),
-    action('print on A4', `Print the drawing of ${of} on A4`, print('A4')),
-    action('on Letter', `Print the drawing of ${of} on Letter`, print('Letter')),
+    action('save as SVG', of, () => saveDrawings(cell)),
+    action('print on A4', of, print('A4')),
+    action('on Letter', of, print('Letter')),
   );
 }

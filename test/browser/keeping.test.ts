@@ -110,7 +110,7 @@ describe('a drawing', () => {
     await cell.scrollIntoViewIfNeeded();
     const [download] = await Promise.all([
       page.waitForEvent('download'),
-      cell.getByRole('button', { name: /^Save the drawing/u }).click(),
+      cell.getByRole('button', { name: /^save as SVG/u }).click(),
     ]);
     expect(download.suggestedFilename()).toBe('1-020-crossing.svg');
     let text = '';
@@ -141,15 +141,15 @@ describe('a drawing', () => {
     });
     await page
       .locator('[id="1+020"]')
-      .getByRole('button', { name: /on A4$/u })
+      .getByRole('button', { name: /^print on A4/u })
       .click();
     await page
       .locator('[id="1+020"]')
-      .getByRole('button', { name: /on Letter$/u })
+      .getByRole('button', { name: /^on Letter/u })
       .click();
     await page
       .locator('[id="3+020"]')
-      .getByRole('button', { name: /on A4$/u })
+      .getByRole('button', { name: /^print on A4/u })
       .click();
     const printed = await page.evaluate(
       () =>
