@@ -1,5 +1,5 @@
-import example from '../../data/examples/low-ferry.json';
-import { parseStudy, readStudy, sentence, writeStudy, type Problem, type Study } from '../../lib/index.ts';
+import { readStudy, sentence, writeStudy, type Problem, type Study } from '../../lib/index.ts';
+import { workedExample } from '../examples.ts';
 import { h } from '../html.ts';
 import {
   deviceCupboard,
@@ -41,12 +41,6 @@ function check(study: Study): readonly Problem[] {
   return read.ok ? [] : read.problems;
 }
 
-function worked(): Study {
-  const parsed = parseStudy(example);
-  if (!parsed.ok) throw new Error(parsed.problems.map(sentence).join(' '));
-  return parsed.value;
-}
-
 /** A study as a page begins with it. */
 interface Opened {
   readonly id: string;
@@ -57,10 +51,12 @@ interface Opened {
   readonly isUnsaved: boolean;
 }
 
-/** The study named in the address with what had not been saved of it, or the worked example under its own id. */
+/** The study named in the address with what had not been saved of it, or a worked example under an id of its own. */
 async function opened(shelf: StudyShelf | null, waiting: Journal): Promise<Opened> {
-  const id = new URLSearchParams(location.search).get('study');
-  const anew = { id: crypto.randomUUID(), study: worked(), revision: 0, problem: '', isUnsaved: false };
+  const asked = new URLSearchParams(location.search);
+  const id = asked.get('study');
+  const study = workedExample(asked.get('example'));
+  const anew = { id: crypto.randomUUID(), study, revision: 0, problem: '', isUnsaved: false };
   if (id === null || shelf === null) return { ...anew, ...(id !== null && { id }) };
   const loaded = await shelf.load(id);
   const unsaved = waiting.get(id);
@@ -72,7 +68,7 @@ async function opened(shelf: StudyShelf | null, waiting: Journal): Promise<Opene
   if (loaded.ok) return { ...anew, id, ...loaded.value };
   return {
     ...anew,
-    problem: `The study asked for was not opened: ${loaded.problems.map(sentence).join(' ')} The worked example is shown instead.`,
+    problem: `The study asked for was not opened: ${loaded.problems.map(sentence).join(' ')} A worked example is shown instead.`,
   };
 }
 

@@ -1,15 +1,8 @@
-import example from '../../data/examples/low-ferry.json';
-import {
-  parseStudy,
-  readStudy,
-  sentence,
-  survey,
-  writeStudy,
-  type Site,
-  type Study,
-} from '../../lib/index.ts';
+import { readStudy, sentence, survey, writeStudy, type Site } from '../../lib/index.ts';
 import { scaleBar } from '../drawing/scaleBar.ts';
+import { largestScale } from '../drawing/scale.ts';
 import { sheet as drawingSheet } from '../drawing/sheet.ts';
+import { exampleNames, workedExample } from '../examples.ts';
 import { countWords, fixed, listed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import {
@@ -26,13 +19,21 @@ import { keptStudies, type KeptStudy } from './kept.ts';
 import { smallCrossing } from './smallCrossing.ts';
 import { studyHref, studyList } from './studyList.ts';
 
-/** Scale at which worked examples are drawn. */
-const EXAMPLE_SCALE = 2500;
-
-function workedExample(): { readonly study: Study; readonly site: Site } {
-  const parsed = parseStudy(example);
-  if (!parsed.ok) throw new Error(parsed.problems.map(sentence).join(' '));
-  return { study: parsed.value, site: survey(parsed.value.brief) };
+/** A worked example on the shelf: what has to be crossed, drawn at the scale of the examples, smaller where it is long. */
+function exampleCell(name: string, widthPx: number): HTMLElement {
+  const { title, brief } = workedExample(name);
+  const site = survey(brief);
+  const scale = largestScale(site.lengthM, Math.max(widthPx, 620) - 40, 2500);
+  return h(
+    'div',
+    { class: 'example' },
+    h('p', {}, h('a', { class: 'title', href: `./option-study.html?example=${name}` }, title)),
+    h('p', { class: 'small' }, exampleWords(site)),
+    h('div', { class: 'pushed' }, smallCrossing(site, scale, `example-${name}`)),
+    drawingSheet(360, 44, `Scale bar, 1 to ${String(scale)}`, [
+      scaleBar(scale, 14, 18, { widthPx: 200, rightPx: 340 }),
+    ]),
+  );
 }
 
 /** 'A railway and a river in 230 m; no pier may stand in 60 m of it.' */
@@ -45,13 +46,13 @@ function exampleWords({ zones, lengthM, mainOpening }: Site): string {
 const answerWords = (kept: readonly KeptStudy[]): string => {
   const count = countWords(kept.length);
   const lie = kept.length === 0 ? 'yet' : 'and nowhere else';
-  return `${count.charAt(0).toUpperCase()}${count.slice(1)} ${kept.length < 2 ? 'study lies' : 'studies lie'} on this device ${lie}. A worked example shows what comes out: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.`;
+  return `${count.charAt(0).toUpperCase()}${count.slice(1)} ${kept.length < 2 ? 'study lies' : 'studies lie'} on this device ${lie}. Worked examples show what comes out: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.`;
 };
 
 function nextWords(kept: readonly KeptStudy[]): HtmlChild {
   const newest = kept.find(({ read }) => read.ok);
   return newest === undefined
-    ? h('a', { href: './option-study.html' }, 'open the worked example')
+    ? h('a', { href: './option-study.html' }, 'open a worked example')
     : [
         'open ',
         h('a', { href: studyHref(newest.stored.id) }, newest.stored.title),
@@ -97,7 +98,6 @@ async function start(): Promise<void> {
     else said.textContent = `Not opened. ${saved.problems.map(sentence).join(' ')}`;
   };
 
-  const { study, site } = workedExample();
   page.mount(document.body, {
     bar: {
       pages: pagesFrom('shelf'),
@@ -150,26 +150,17 @@ async function start(): Promise<void> {
       ]),
       page.section(
         2,
-        'Worked example',
-        'Complete and invented; the first change makes it a study of your own.',
-        [
+        'Worked examples',
+        'Complete and invented; the first change makes one a study of your own.',
+        exampleNames.map((name, at) =>
           page.cell({
-            station: '2+010',
-            title: 'Worked example',
+            station: `2+0${at + 1}0`,
+            title: workedExample(name).title,
             shows: {},
-            body: h(
-              'div',
-              { class: 'example' },
-              h('p', {}, h('a', { class: 'title', href: './option-study.html' }, study.title)),
-              h('p', { class: 'small' }, exampleWords(site)),
-              h('div', { class: 'pushed' }, smallCrossing(site, EXAMPLE_SCALE, 'example')),
-              drawingSheet(360, 44, `Scale bar, 1 to ${String(EXAMPLE_SCALE)}`, [
-                scaleBar(EXAMPLE_SCALE, 14, 18, { widthPx: 200, rightPx: 340 }),
-              ]),
-            ),
-            notes: [h('p', {}, example.notice)],
+            body: (_, room) => exampleCell(name, room.widthPx),
+            notes: at === 0 ? [h('p', {}, workedExample(name).notice)] : [],
           }),
-        ],
+        ),
       ),
       page.section(3, 'What it is for, and what it is not', null, [
         page.cell({

@@ -75,7 +75,7 @@ export function studyList(spec: StudyListSpec): HtmlChild {
       ? h(
           'p',
           { class: 'prose' },
-          'No study lies here yet. The worked example becomes yours with the first change to it.',
+          'No study lies here yet. A worked example becomes yours with the first change to it.',
         )
       : [
           h(

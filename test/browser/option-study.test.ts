@@ -125,7 +125,7 @@ describe('option study', () => {
 
   it('the shelf leads to the study', async () => {
     const { page, heard } = await site.open('index.html');
-    await page.getByRole('link', { name: 'open the worked example' }).click();
+    await page.getByRole('link', { name: 'open a worked example' }).click();
     await settled(page);
     silent(heard);
   });

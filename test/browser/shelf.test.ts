@@ -43,7 +43,7 @@ describe('shelf', () => {
     const scale = page.locator('[id="2+010"] .elevation');
     expect(await scale.getAttribute('data-scale')).toBe('2500');
     expect(await page.locator('body').innerText()).toContain('not for construction');
-    expect(await page.getByRole('link', { name: 'open the worked example' }).getAttribute('href')).toBe(
+    expect(await page.getByRole('link', { name: 'open a worked example' }).getAttribute('href')).toBe(
       './option-study.html',
     );
     silent(heard);
