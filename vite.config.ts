@@ -51,6 +51,8 @@ export default defineConfig({
           include: ['test/**/*.test.ts'],
           exclude: ['test/browser/**'],
           isolate: false,
+          // Left to itself the runner keeps a processor free.
+          maxWorkers: '100%',
           setupFiles: ['test/setup.ts'],
           testTimeout: 30_000,
           hookTimeout: 60_000,

@@ -1,6 +1,6 @@
 // Installs the packages of the lock file, only when the lock file has changed since the last time.
 import { createHash } from 'node:crypto';
-import { spawnSync } from 'node:child_process';
+import { spawn, spawnSync } from 'node:child_process';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { resolve } from 'node:path';
 
@@ -11,6 +11,22 @@ export function run(command, args, env = {}) {
   const result = spawnSync(command, args, { cwd: root, stdio: 'inherit', env: { ...process.env, ...env } });
   if (result.error) fail(`${command} could not be started: ${result.error.message}`);
   if (result.status !== 0) process.exit(result.status ?? 1);
+}
+
+/** Runs commands beside each other; ends the process with the code of the first that fails, once all have ended. */
+export async function runTogether(commands) {
+  const codes = await Promise.all(
+    commands.map(
+      ([command, ...args]) =>
+        new Promise((ended) => {
+          const child = spawn(command, args, { cwd: root, stdio: 'inherit' });
+          child.on('error', ({ message }) => fail(`${command} could not be started: ${message}`));
+          child.on('close', (code) => ended(code ?? 1));
+        }),
+    ),
+  );
+  const failed = codes.find((code) => code !== 0);
+  if (failed !== undefined) process.exit(failed);
 }
 
 export function fail(words) {

@@ -2,16 +2,18 @@
 import { spawnSync } from 'node:child_process';
 import { mkdirSync, readFileSync } from 'node:fs';
 import { resolve } from 'node:path';
-import { install, root, run } from './install.mjs';
+import { install, root, runTogether } from './install.mjs';
 
 install();
 const started = performance.now();
 const { findChromium } = await import('./chromium.mjs');
 const chromium = await findChromium();
 
-run('npm', ['run', '--silent', 'types']);
-run('npm', ['run', '--silent', 'lint']);
-run('npx', ['vite', 'build', '--logLevel', 'warn']);
+await runTogether([
+  ['npm', 'run', '--silent', 'types'],
+  ['npm', 'run', '--silent', 'lint'],
+  ['npx', 'vite', 'build', '--logLevel', 'warn'],
+]);
 
 mkdirSync(resolve(root, '.cache'), { recursive: true });
 let passed = 0;
