@@ -23,7 +23,7 @@ export interface UnitTask {
   readonly deckPlateM?: number;
   /** Cable-stayed: which supports (0-based) carry pylons. */
   readonly pylons?: readonly number[];
-  /** Height of the road above ground at each support, m, where known (pylon legs, falsework). */
+  /** Height of the soffit above ground at each support, m, where known (pylon legs, walls, falsework). */
   readonly clearUnderM?: readonly number[];
 }
 

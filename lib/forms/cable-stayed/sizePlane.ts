@@ -78,9 +78,11 @@ export function sizePlane(task: UnitTask): SizedBridge {
   });
   const symmetrical = isSymmetrical(task.spansM, layout);
   const zones = deckZones(layout, symmetrical);
-  const belowM = layout.pylons.map(
-    ({ support }) => task.clearUnderM?.[support] ?? cableData.assumedHeightM.value,
-  );
+  // Legs reach from the ground to the deck's face.
+  const belowM = layout.pylons.map(({ support }) => {
+    const soffitM = task.clearUnderM?.[support];
+    return soffitM === undefined ? cableData.assumedHeightM.value : soffitM + task.depthM;
+  });
   const fixedKNm = (floor.slabKNm + floor.steelKNm + deck.superimposedKNm) / 2;
   const range = stayRangeLimitMPa(task.standard);
 

@@ -5,20 +5,19 @@ import { boxData } from './boxData.ts';
 export interface HeightUnder {
   readonly known: boolean;
   readonly soffitM: readonly number[];
-  /** Height of the road above ground, mean of the supports, m. */
-  readonly meanM: number;
+  /** Height of the road above ground that is taken where nothing is given, m. */
+  readonly assumedRoadM: number;
 }
 
-/** Mean of the two supports of each span less the depth; the assumed height where the task gives none. */
+/** Mean of the two supports of each span; where the task gives none that of a road at the assumed height. */
 export function heightUnder(task: UnitTask): HeightUnder {
   const given = task.clearUnderM;
   const known = given !== undefined && given.length === task.spansM.length + 1;
-  const road = known
-    ? given
-    : Array.from({ length: task.spansM.length + 1 }, () => boxData.assumedHeightM.value);
+  const assumedRoadM = boxData.assumedHeightM.value;
+  const assumedM = Math.max(0, assumedRoadM - task.depthM);
   return {
     known,
-    soffitM: task.spansM.map((_, i) => Math.max(0, (road[i]! + road[i + 1]!) / 2 - task.depthM)),
-    meanM: road.reduce((sum, height) => sum + height, 0) / road.length,
+    assumedRoadM,
+    soffitM: task.spansM.map((_, i) => (known ? (given[i]! + given[i + 1]!) / 2 : assumedM)),
   };
 }

@@ -35,7 +35,7 @@ function size(task: UnitTask): Design {
   const warnings = overLimit(checks, 'tendons and concrete');
   if (task.method !== 'launch' && !heightUnder(task).known)
     warnings.push(
-      `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).meanM} m above ground.`,
+      `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).assumedRoadM} m above ground.`,
     );
   return {
     task,

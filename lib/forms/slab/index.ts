@@ -34,7 +34,7 @@ function size(task: UnitTask): Design {
   const warnings = overLimit(checks, model.prestressed ? 'tendons and bars' : 'bars');
   if (!heightUnder(task).known)
     warnings.push(
-      `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).meanM} m above ground.`,
+      `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).assumedRoadM} m above ground.`,
     );
   return {
     task,

@@ -130,14 +130,15 @@ export function temporaryTowers({ task }: SteelBoxModel): { count: number; heigh
   const known = clearUnderM !== undefined && clearUnderM.length === spansM.length + 1;
   if (task.method === 'launch') return { count: 0, heightM: 0, known };
   const cantilevered = new Set(cantileveredSpans({ task }));
-  const road = (j: number): number => (known ? clearUnderM[j]! : steelBoxData.assumedHeightM.value);
+  const assumedM = Math.max(0, steelBoxData.assumedHeightM.value - depthM);
+  const soffit = (j: number): number => (known ? clearUnderM[j]! : assumedM);
   let count = 0;
   let heightM = 0;
   spansM.forEach((span, i) => {
     if (cantilevered.has(i)) return;
     const towers = Math.max(0, Math.ceil(span / steelBoxData.cantilever.towerEveryM - 1e-9) - 1);
     count += towers;
-    heightM += towers * Math.max(0, (road(i) + road(i + 1)) / 2 - depthM);
+    heightM += towers * ((soffit(i) + soffit(i + 1)) / 2);
   });
   return { count, heightM, known };
 }

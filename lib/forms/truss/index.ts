@@ -80,7 +80,7 @@ function heightsUnder(task: UnitTask): { heights: number[]; known: boolean } {
   const under = task.clearUnderM;
   const known = under !== undefined && under.length === task.spansM.length + 1;
   const heights = task.spansM.map((_, i) =>
-    known ? Math.max(0, (under[i]! + under[i + 1]!) / 2 - task.depthM) : trussData.assumedHeightM.value,
+    known ? (under[i]! + under[i + 1]!) / 2 : trussData.assumedHeightM.value,
   );
   return { heights, known };
 }

@@ -73,7 +73,10 @@ describe('cableStayed.size(task)', () => {
       expect(points[1]![1]).toBeLessThanOrEqual(design.figures['pylonHeightM']! + 1e-9);
     }
     const legs = design.elevation.filter(({ part }) => part === 'pylon');
-    expect(Math.min(...legs.flatMap(({ points }) => points.map(([, z]) => z)))).toBe(-22);
+    expect(Math.min(...legs.flatMap(({ points }) => points.map(([, z]) => z)))).toBeCloseTo(
+      -22 - task.depthM,
+      9,
+    );
     expect(design.sections.map(({ at }) => at)).toEqual(['midspan', 'pylon']);
   });
 
