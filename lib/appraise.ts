@@ -25,8 +25,8 @@ function* half<T>(which: 0 | 1, steps: Steps<T>): Steps<T> {
 export function* appraiseSteps(study: Study, kept: Memory = memory()): Steps<Appraisal> {
   const found = yield* half(0, proposeSteps(study, formsAsked(study), kept));
   const registered = optionsOf(study, found);
-  const priced = yield* half(1, workOutSteps(study, registered.options, kept));
-  return conclude(study, found, registered, priced);
+  const outcomes = yield* half(1, workOutSteps(study, registered.options, kept));
+  return conclude(study, found, registered, outcomes);
 }
 
 /** A whole study at one go; see `appraiseSteps`. */

@@ -9,12 +9,12 @@ export {
   workOutSteps,
   type FormProposals,
   type LaidRow,
+  type Outcome,
   type Share,
   type Step,
   type Steps,
 } from './appraise/parts.ts';
 export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
-export type { PricedAppraisal } from './appraise/appraiseOption.ts';
 export { depthTrials } from './appraise/depthTrials.ts';
 export { formFacts } from './appraise/facts.ts';
 export { PIER_HALF_WIDTH_M } from './appraise/requestFor.ts';

@@ -2,8 +2,7 @@ import { stand } from '../decide/index.ts';
 import type { Appraisal, Study } from '../model/index.ts';
 import { survey } from '../site/index.ts';
 import { fingerprint } from '../study/index.ts';
-import type { PricedAppraisal } from './appraiseOption.ts';
-import type { FormProposals } from './parts.ts';
+import type { FormProposals, Outcome } from './parts.ts';
 import { numberOptions, type Registered } from './register.ts';
 
 /** The options of a study with their numbers: those kept by hand, and what was proposed for each form in order. */
@@ -22,8 +21,9 @@ export function conclude(
   study: Study,
   found: readonly FormProposals[],
   { register, retired, unworkable }: Registered,
-  priced: readonly PricedAppraisal[],
+  outcomes: readonly Outcome[],
 ): Appraisal {
+  const priced = outcomes.filter((outcome) => 'totals' in outcome);
   const contenders = priced.map(({ option: { number, status, cost }, totals }) => ({
     number,
     status,
@@ -42,6 +42,7 @@ export function conclude(
         arrangements.length === 0 ? [{ form, because }] : [],
       ),
       ...unworkable,
+      ...outcomes.filter((outcome) => 'because' in outcome),
     ],
     droppedCounts: found.flatMap(({ counts }) => counts),
     register,

@@ -1,5 +1,5 @@
 import { formModule, sizeableForms } from '../forms/index.ts';
-import type { FormId, Option, Study } from '../model/index.ts';
+import type { Dropped, FormId, Option, Study } from '../model/index.ts';
 import { appraiseOption, type PricedAppraisal } from './appraiseOption.ts';
 import { drawn } from './drawn.ts';
 import type { Memory, Proposals, TrialRow } from './memory.ts';
@@ -62,25 +62,38 @@ export function* proposeSteps(study: Study, forms: readonly FormId[], kept: Memo
   for (const form of forms) {
     const step = { done: found.length, of: forms.length, what: `arranging ${formModule(form).name}` };
     yield step;
-    found.push({ form, ...(yield* saying(step, proposalsFor(bench, form))) });
+    try {
+      found.push({ form, ...(yield* saying(step, proposalsFor(bench, form))) });
+    } catch (error) {
+      found.push({ form, arrangements: [], counts: [], because: [refusalOf(error)] });
+    }
   }
   return found;
 }
 
-/** Works out, prices and rules on some options of a study. */
-export function* workOutSteps(
-  study: Study,
-  options: readonly Option[],
-  kept: Memory,
-): Steps<PricedAppraisal[]> {
+/** Why a form or an option cannot serve what is asked of it; anything else that is thrown is a fault and goes on. */
+function refusalOf(error: unknown): string {
+  if (!(error instanceof RangeError)) throw error;
+  return error.message;
+}
+
+/** An option worked out, or why it cannot be. */
+export type Outcome = PricedAppraisal | Dropped;
+
+/** Works out, prices and rules on some options of a study, each by itself: one that cannot be sized stops none of the others. */
+export function* workOutSteps(study: Study, options: readonly Option[], kept: Memory): Steps<Outcome[]> {
   const bench = workbench(study, kept);
   const forms = new Set(options.flatMap((option) => option.units.map((unit) => unit.form)));
   const onDraws = drawn(bench, [...forms].sort());
-  const priced: PricedAppraisal[] = [];
+  const outcomes: Outcome[] = [];
   for (const option of options) {
-    const step = { done: priced.length, of: options.length, what: `working out option ${option.number}` };
+    const step = { done: outcomes.length, of: options.length, what: `working out option ${option.number}` };
     yield step;
-    priced.push(yield* saying(step, appraiseOption(bench, onDraws, option)));
+    try {
+      outcomes.push(yield* saying(step, appraiseOption(bench, onDraws, option)));
+    } catch (error) {
+      outcomes.push({ form: option.form, option: option.number, because: [refusalOf(error)] });
+    }
   }
-  return priced;
+  return outcomes;
 }

@@ -8,7 +8,7 @@ import type { jobs } from './jobs.ts';
 export interface Appraiser {
   /** The appraisal of a study; can be aborted, tells how far it has come. Fits the run of a slow cell. */
   readonly appraise: (study: Study, run?: Partial<SlowRun>) => Promise<Appraisal>;
-  /** Options of a study as they are given, worked out and priced, in their order. */
+  /** Options of a study as they are given, worked out and priced, in their order; without those that cannot be. */
   readonly workOut: (
     study: Study,
     options: readonly Option[],
@@ -72,14 +72,14 @@ export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser
     );
     found.sort((a, b) => forms.indexOf(a.form) - forms.indexOf(b.form));
     const registered = optionsOf(study, found);
-    const priced = await round(2, (worker, share, run) =>
+    const outcomes = await round(2, (worker, share, run) =>
       worker.call(
         'workOut',
         { study, options: registered.options.filter(({ form }) => workerOf(form) === share) },
         run,
       ),
     );
-    return conclude(study, found, registered, priced);
+    return conclude(study, found, registered, outcomes);
   };
 }
 
@@ -100,8 +100,8 @@ export function appraiser(): Appraiser {
   return {
     appraise: appraiseWith(started.map(({ line }) => line)),
     async workOut(study, options, run) {
-      const priced = await started[0]!.line.call('workOut', { study, options }, run);
-      return priced.map(({ option }) => option);
+      const outcomes = await started[0]!.line.call('workOut', { study, options }, run);
+      return outcomes.flatMap((outcome) => ('totals' in outcome ? [outcome.option] : []));
     },
     end() {
       for (const { worker, line } of started) {

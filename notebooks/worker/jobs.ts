@@ -1,5 +1,5 @@
 import { laySteps, memory, proposeSteps, workOutSteps } from '../../lib/index.ts';
-import type { FormId, LaidRow, Option, PricedAppraisal, Share, Study, Steps } from '../../lib/index.ts';
+import type { FormId, LaidRow, Option, Outcome, Share, Study, Steps } from '../../lib/index.ts';
 
 /** Kept as long as the worker lives: the next study is nearly always the last one with one thing changed. */
 const kept = memory();
@@ -25,9 +25,11 @@ export const jobs = {
   },
 
   /** Works out some options. */
-  *workOut({ study, options }: Part & { readonly options: readonly Option[] }): Steps<PricedAppraisal[]> {
-    const priced = yield* workOutSteps(study, options, kept);
+  *workOut({ study, options }: Part & { readonly options: readonly Option[] }): Steps<Outcome[]> {
+    const outcomes = yield* workOutSteps(study, options, kept);
     // Totals move to the page; those in memory stay.
-    return priced.map(({ option, totals }) => ({ option, totals: totals.slice() }));
+    return outcomes.map((outcome) =>
+      'totals' in outcome ? { ...outcome, totals: outcome.totals.slice() } : outcome,
+    );
   },
 };
