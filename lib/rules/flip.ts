@@ -36,16 +36,18 @@ export function nearestChange(
     if (typeof from !== 'number' || !Number.isFinite(from)) continue;
     const { step = 0, unit } = factById(id);
     const limits = new Set(conditions.flatMap((condition) => limitsOn(condition, id, facts)));
-    for (const limit of limits) {
-      for (const to of [limit, tidy(limit - step), tidy(limit + step)]) {
-        const change = size(from, to);
-        if (to === from || !(change < least)) continue;
-        const then = outcome({ ...facts, [id]: to });
-        if (then === undefined || then === now) continue;
-        least = change;
-        best = { fact: id, from, to, unit };
-      }
-    }
+    const changes = [...limits]
+      .flatMap((limit) => [limit, tidy(limit - step), tidy(limit + step)])
+      .filter((to) => to !== from)
+      .sort((a, b) => Math.abs(a - from) - Math.abs(b - from));
+    // Of one fact the nearest value, of several facts the one that changes by the least share of itself.
+    const to = changes.find((value) => {
+      const then = outcome({ ...facts, [id]: value });
+      return then !== undefined && then !== now;
+    });
+    if (to === undefined || !(size(from, to) < least)) continue;
+    least = size(from, to);
+    best = { fact: id, from, to, unit };
   }
   return best;
 }

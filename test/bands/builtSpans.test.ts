@@ -35,8 +35,8 @@ describe('builtSpans(form)', () => {
     expect(formIds.filter((form) => builtSpans(form) === null)).toEqual([
       'portal-frame',
       'precast-trough',
-      'adjacent-box',
       'half-through',
+      'adjacent-box',
       'steel-box',
       'extradosed',
     ]);

@@ -17,7 +17,11 @@ const dictionary = new Map(factDictionary.map((fact) => [fact.id, fact]));
 
 /** Values of one fact of a rule: round its limits, on them, far from them, and unknown. */
 function valuesOf(id: string, condition: Condition): fc.Arbitrary<FactValue> {
-  const { kind, step = 1, values = ['launch', 'falsework', 'crane'] } = dictionary.get(id)!;
+  const {
+    kind,
+    step = 1,
+    values = ['launch', 'falsework', 'crane', 'balanced-cantilever'],
+  } = dictionary.get(id)!;
   if (kind === 'boolean') return fc.constantFrom<FactValue>(true, false, 'unknown');
   if (kind === 'text') return fc.constantFrom<FactValue>(...values, 'unknown');
   const limits = limitsOn(condition, id, {});
@@ -141,11 +145,17 @@ describe('evaluate(condition, facts) on random trees', () => {
         let nearest = Infinity;
         for (const [id, from] of Object.entries(facts)) {
           const { step = 1 } = dictionary.get(id)!;
+          let own = Infinity;
           for (let n = Math.round(-1 / step); n <= Math.round(10 / step); n += 1) {
             const to = Number((n * step).toPrecision(12));
-            if (evaluate(condition, { ...facts, [id]: to }).truth !== before)
-              nearest = Math.min(nearest, Math.abs(to - from) / Math.max(Math.abs(to), Math.abs(from)));
+            if (
+              evaluate(condition, { ...facts, [id]: to }).truth !== before &&
+              Math.abs(to - from) < Math.abs(own - from)
+            )
+              own = to;
           }
+          if (own !== Infinity)
+            nearest = Math.min(nearest, Math.abs(own - from) / Math.max(Math.abs(own), Math.abs(from)));
         }
         if (change === undefined) expect(nearest).toBe(Infinity);
         else

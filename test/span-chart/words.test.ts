@@ -51,7 +51,7 @@ describe('spanRows(guide, order)', () => {
 describe('words of the page', () => {
   it('answerWords names the forms that are in and counts the others', () => {
     expect(answerWords(guide({ spanM: 63, widthM: 12.5 }))).toBe(
-      'Composite box, composite I and cantilever-built box are in; six more are possible, eight are out.',
+      'Composite box, composite I and cantilever-built box are in; seven more are possible, seven are out.',
     );
   });
   it('answerWords says so when no form is in', () => {
