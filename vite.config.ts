@@ -1,6 +1,6 @@
 import { readdirSync } from 'node:fs';
 import { resolve } from 'node:path';
-import type { Plugin } from 'vite';
+import { runnerImport, type Plugin } from 'vite';
 import { defineConfig } from 'vitest/config';
 
 const root = import.meta.dirname;
@@ -25,18 +25,33 @@ const contentPolicy: Plugin = {
   ],
 };
 
+/** The worked examples come worked out, so that a page has something to show at once. */
+const workedAnswers: Plugin = {
+  name: 'worked-answers',
+  apply: 'build',
+  async generateBundle() {
+    const made = await runnerImport<typeof import('./notebooks/worked/workExamples.ts')>(
+      resolve(root, 'notebooks/worked/workExamples.ts'),
+      { configFile: false, root, logLevel: 'silent' },
+    );
+    for (const { name, text } of made.module.workExamples())
+      this.emitFile({ type: 'asset', fileName: `worked/${name}.json`, source: text });
+  },
+};
+
 export default defineConfig({
   root: resolve(root, 'notebooks'),
   base: './',
   publicDir: false,
-  plugins: [contentPolicy],
+  plugins: [contentPolicy, workedAnswers],
   build: {
     outDir: resolve(root, 'dist'),
     emptyOutDir: true,
     target: 'es2022',
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
-    rolldownOptions: { input: pages },
+    chunkSizeWarningLimit: 1500,
+    rolldownOptions: { input: pages, checks: { bundlerTimings: false } },
   },
   worker: { format: 'es' },
   server: { fs: { allow: [root] } },

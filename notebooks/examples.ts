@@ -11,13 +11,18 @@ const files = {
   'tanners-yard': tannersYard,
   'sarrow-estuary': sarrowEstuary,
 } as const;
+export type ExampleName = keyof typeof files;
 
-/** A worked example by name; the first for a name that none of them has. */
-export function workedExample(name: string | null): Study {
-  const parsed = parseStudy(Object.entries(files).find(([known]) => known === name)?.[1] ?? lowFerry);
+/** Names of the worked examples in the order of the shelf. */
+export const exampleNames = Object.keys(files) as readonly ExampleName[];
+
+/** The example of a name, the first for a name that none of them has. */
+export const exampleNamed = (name: string | null): ExampleName =>
+  exampleNames.find((known) => known === name) ?? 'low-ferry';
+
+/** A worked example as a study. */
+export function workedExample(name: ExampleName): Study {
+  const parsed = parseStudy(files[name]);
   if (!parsed.ok) throw new Error(parsed.problems.map(sentence).join(' '));
   return parsed.value;
 }
-
-/** Names of the worked examples in the order of the shelf. */
-export const exampleNames: readonly string[] = Object.keys(files);

@@ -1,5 +1,5 @@
 import { readStudy, sentence, writeStudy, type Problem, type Study } from '../../lib/index.ts';
-import { workedExample } from '../examples.ts';
+import { exampleNamed, workedExample } from '../examples.ts';
 import { h } from '../html.ts';
 import {
   deviceCupboard,
@@ -21,6 +21,7 @@ import {
   type StudyShelf,
 } from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
+import { answeredFirst, answerOf } from '../worked/answeredFirst.ts';
 import { appraiser } from '../worker/index.ts';
 import { arrangementSection } from './arrangementSection.ts';
 import { briefSection } from './briefSection.ts';
@@ -41,6 +42,8 @@ function check(study: Study): readonly Problem[] {
   return read.ok ? [] : read.problems;
 }
 
+const query = new URLSearchParams(location.search);
+
 /** A study as a page begins with it. */
 interface Opened {
   readonly id: string;
@@ -53,9 +56,8 @@ interface Opened {
 
 /** The study named in the address with what had not been saved of it, or a worked example under an id of its own. */
 async function opened(shelf: StudyShelf | null, waiting: Journal): Promise<Opened> {
-  const asked = new URLSearchParams(location.search);
-  const id = asked.get('study');
-  const study = workedExample(asked.get('example'));
+  const id = query.get('study');
+  const study = workedExample(exampleNamed(query.get('example')));
   const anew = { id: crypto.randomUUID(), study, revision: 0, problem: '', isUnsaved: false };
   if (id === null || shelf === null) return { ...anew, ...(id !== null && { id }) };
   const loaded = await shelf.load(id);
@@ -74,7 +76,8 @@ async function opened(shelf: StudyShelf | null, waiting: Journal): Promise<Opene
 
 async function start(): Promise<void> {
   // They load while the page looks for its study.
-  const workers = appraiser();
+  const example = query.has('study') ? null : exampleNamed(query.get('example'));
+  const workers = example === null ? appraiser() : answeredFirst(appraiser(), answerOf(example));
   const cupboard = await deviceCupboard().catch(() => null);
   const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
   const unsaved = journal(localStorage);

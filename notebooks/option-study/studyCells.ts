@@ -4,6 +4,7 @@ import type { Hold } from '../drawing/hold.ts';
 import type { InHand } from '../drawing/pierHandles.ts';
 import { share, untilDragRests, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
+import { askedOf } from '../worked/askedOf.ts';
 import type { Appraiser } from '../worker/index.ts';
 
 /** What the sections of the option study show, and how each hangs on the slices of the study. */
@@ -56,15 +57,8 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
 
   const site = graph.cell('site', { brief }, (v) => survey(v.brief), { equal: () => false });
   const asked = graph.cell('asked', { head, brief, books, options }, (v): Study => {
-    before = share(before, {
-      ...v.head,
-      brief: v.brief,
-      books: v.books,
-      options: { ...v.options, reference: null, register: [] },
-      priorities: { weights: {} },
-      notes: [],
-      decision: null,
-    });
+    const { head, brief, books, options } = v;
+    before = share(before, askedOf({ ...store.valid(), ...head, brief, books, options }));
     return before;
   });
   const last = graph.input<Answer | null>('last answer', null);

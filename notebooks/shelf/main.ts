@@ -2,7 +2,7 @@ import { readStudy, sentence, survey, writeStudy, type Site } from '../../lib/in
 import { scaleBar } from '../drawing/scaleBar.ts';
 import { largestScale } from '../drawing/scale.ts';
 import { sheet as drawingSheet } from '../drawing/sheet.ts';
-import { exampleNames, workedExample } from '../examples.ts';
+import { exampleNames, workedExample, type ExampleName } from '../examples.ts';
 import { countWords, fixed, listed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import {
@@ -20,7 +20,7 @@ import { smallCrossing } from './smallCrossing.ts';
 import { studyHref, studyList } from './studyList.ts';
 
 /** A worked example on the shelf: what has to be crossed, drawn at the scale of the examples, smaller where it is long. */
-function exampleCell(name: string, widthPx: number): HTMLElement {
+function exampleCell(name: ExampleName, widthPx: number): HTMLElement {
   const { title, brief } = workedExample(name);
   const site = survey(brief);
   const scale = largestScale(site.lengthM, Math.max(widthPx, 620) - 40, 2500);

@@ -1,0 +1,10 @@
+import type { Study } from '../../lib/index.ts';
+
+/** What of a study its answer hangs on: views, numbers given before, priorities, notes and the decision are left out. */
+export const askedOf = (study: Study): Study => ({
+  ...study,
+  options: { ...study.options, reference: null, register: [] },
+  priorities: { weights: {} },
+  notes: [],
+  decision: null,
+});
