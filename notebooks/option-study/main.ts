@@ -87,7 +87,7 @@ async function start(): Promise<void> {
   const graph = newGraph();
   const store = studyStore(graph, study, check, () => kept?.mayChange() ?? true);
   const cells = studyCells(graph, store, workers);
-  const page = sheet(graph);
+  const page = sheet(graph, { aside: [cells.byDepth, cells.spanning] });
 
   const saved = h('span', { class: 'state', role: 'status' }, problem);
   const button = (words: string, act: () => void): HTMLElement =>
@@ -171,8 +171,12 @@ async function start(): Promise<void> {
   document.title = `${study.title} · Spanledger`;
 
   const setReadOnly = readOnly(element);
+  let addressed: string | null = null;
+  /** Puts the study into the address, where it is not there yet: telling the browser takes longer than a drawing. */
   const address = (): void => {
-    if (kept !== null) history.replaceState(null, '', `?study=${encodeURIComponent(kept.id())}`);
+    if (kept === null || kept.id() === addressed) return;
+    addressed = kept.id();
+    history.replaceState(null, '', `?study=${encodeURIComponent(addressed)}`);
   };
   if (shelf !== null) {
     kept = keeping({

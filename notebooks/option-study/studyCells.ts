@@ -2,7 +2,7 @@ import { appraiseKept, depthTrials, formFacts, guide, memory, survey } from '../
 import type { Appraisal, AppraisedOption, RegisterEntry, Study } from '../../lib/index.ts';
 import type { Hold } from '../drawing/hold.ts';
 import type { InHand } from '../drawing/pierHandles.ts';
-import { share, untilDragRests, type StudyStore } from '../page/index.ts';
+import { share, untilDragRests, whenIdle, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import { askedOf } from '../worked/askedOf.ts';
 import type { Appraiser } from '../worker/index.ts';
@@ -111,6 +111,17 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     },
     { policy: 'latest' },
   );
+  // What a drag will ask for at its first move: the draws are drawn by then. Not before everything else is there.
+  graph.watch(byDepth, (state) => {
+    if (state.state !== 'ready') return;
+    whenIdle(() => {
+      const [now, views] = [graph.state(last), graph.state(options)];
+      const answer = now.state === 'ready' ? now.value : null;
+      if (answer === null || answer.asked !== answered || views.state !== 'ready') return;
+      const option = held(answer.asked, answer, views.value.reference);
+      if (option !== undefined) appraiseKept(answer.asked, option, kept);
+    });
+  });
   const hold = graph.input<Hold | null>('hold', null);
   const hands = graph.cell('hands', { hold, options, reference }, (v): InHand => {
     const own = v.options.kept.find(({ number }) => number === v.reference?.number);
@@ -129,18 +140,25 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     const now = options.map((one) => (one.number === option.number ? option : one));
     return { appraisal, options: now, reference: option, movedNumber: option.number };
   });
-  const spanning = graph.cell('spanning', { site }, (v) => {
-    const { mainSpanM } = formFacts(v.site);
-    if (typeof mainSpanM !== 'number') return null;
-    return guide({
-      spanM: mainSpanM,
-      widthM: v.site.deck.widthM,
-      lengthM: v.site.lengthM,
-      ...(v.site.planRadiusM !== null && Number.isFinite(v.site.planRadiusM)
-        ? { radiusM: v.site.planRadiusM }
-        : {}),
-    });
-  });
+  /** What can span the main span; waits while a figure is dragged, whose drawings have the time to themselves. */
+  const spanning = graph.slow(
+    'spanning',
+    { site },
+    async (v, run) => {
+      const { mainSpanM } = formFacts(v.site);
+      if (typeof mainSpanM !== 'number') return null;
+      await untilDragRests(run.signal);
+      return guide({
+        spanM: mainSpanM,
+        widthM: v.site.deck.widthM,
+        lengthM: v.site.lengthM,
+        ...(v.site.planRadiusM !== null && Number.isFinite(v.site.planRadiusM)
+          ? { radiusM: v.site.planRadiusM }
+          : {}),
+      });
+    },
+    { policy: 'latest' },
+  );
   return {
     brief,
     books,

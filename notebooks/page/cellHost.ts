@@ -1,6 +1,7 @@
 import { h } from '../html.ts';
 import type { HtmlChild } from '../html.ts';
 import type { Cell, Graph, Progress, State, Uses, Values } from '../reactive/index.ts';
+import { isDragging } from './dragging.ts';
 import type { Frames } from './frames.ts';
 import { lateness } from './lateness.ts';
 import { renew } from './renew.ts';
@@ -201,8 +202,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   };
 
   /** While something is dragged or worked out the time belongs to what is seen; the rest is drawn once, at the end. */
-  const canWait = (): boolean =>
-    !isNear && paper === null && (document.documentElement.classList.contains('dragging') || page.isBusy());
+  const canWait = (): boolean => !isNear && paper === null && (isDragging() || page.isBusy());
 
   const update = (): void => {
     const waits = canWait();

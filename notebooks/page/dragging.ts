@@ -1,3 +1,5 @@
+import { screenFrames } from './frames.ts';
+
 /** How far the pointer has come since it went down, px, and which keys are held. */
 export interface DragAt {
   readonly dx: number;
@@ -26,12 +28,15 @@ const SLACK_PX = 3;
 /** A drag that rests for this long lets slow work go on, ms. */
 const REST_MS = 120;
 
+/** Whether something is being dragged: what is not seen then waits. */
+export const isDragging = (): boolean => document.documentElement.classList.contains('dragging');
+
 /**
  * Resolves at once unless something is dragged, else on its release or once it rests: what takes long waits for that. Never
  * resolves after `signal` has been aborted, which is what the next step of the drag does.
  */
 export function untilDragRests(signal: AbortSignal): Promise<void> {
-  if (!document.documentElement.classList.contains('dragging')) return Promise.resolve();
+  if (!isDragging()) return Promise.resolve();
   return new Promise((resolve) => {
     const timer = setTimeout(resolve, REST_MS);
     signal.addEventListener('abort', () => clearTimeout(timer));
@@ -52,6 +57,14 @@ export function draggable(element: Element, { may, start, move, end, cancel, tap
     const listening = new AbortController();
     const { signal } = listening;
     let isDrag = false;
+    /** Where it has come to and has not been moved to yet: of several moves in one frame only the last is seen. */
+    let waiting: DragAt | null = null;
+    const moveNow = (): void => {
+      if (waiting === null) return;
+      const at = waiting;
+      waiting = null;
+      move(at);
+    };
 
     const stop = (): void => {
       listening.abort();
@@ -66,14 +79,18 @@ export function draggable(element: Element, { may, start, move, end, cancel, tap
         page.getSelection()?.removeAllRanges();
         start?.();
       }
-      move(at);
+      if (waiting === null) screenFrames.hand(moveNow);
+      waiting = at;
     };
     const onUp = (): void => {
+      // The last move is no step of a drag any more: what it asks for need not wait for a rest.
       stop();
+      moveNow();
       if (isDrag) end();
       else tap?.();
     };
     const onCancel = (): void => {
+      waiting = null;
       stop();
       if (isDrag) cancel();
     };

@@ -3,6 +3,8 @@ import { h } from '../html.ts';
 export interface WalkSpec {
   /** The figures of the cell that are seen, in page order. */
   readonly figures: () => readonly Element[];
+  /** Whether there are any: sooner told than which. */
+  readonly hasFigures: () => boolean;
   /** A figure in words. */
   readonly say: (figure: Element) => string;
   readonly ask: (figure: Element) => void;
@@ -40,7 +42,7 @@ function nearest(figures: readonly Element[], at: number, way: 1 | -1): number {
  * The action 'Where from?' under a cell. While it has the focus one figure of the cell is framed; left and right go to
  * the next, up and down to the nearest, Enter asks.
  */
-export function figureWalk({ figures, say, ask }: WalkSpec): FigureWalk {
+export function figureWalk({ figures, hasFigures, say, ask }: WalkSpec): FigureWalk {
   let at = 0;
   let framed: Element | undefined;
   const said = h('span', { class: 'pointed-words', 'aria-live': 'polite' });
@@ -92,7 +94,7 @@ export function figureWalk({ figures, say, ask }: WalkSpec): FigureWalk {
   return {
     element,
     update() {
-      element.toggleAttribute('hidden', figures().length === 0);
+      element.toggleAttribute('hidden', !hasFigures());
       frame();
     },
     focus: () => button.focus({ preventScroll: true }),

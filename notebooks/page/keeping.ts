@@ -1,4 +1,5 @@
 import type { Problem, Study } from '../../lib/index.ts';
+import { isDragging } from './dragging.ts';
 import { isOf, type Journal } from './journal.ts';
 import { ownership, type Ownership } from './ownership.ts';
 import type { StudyFormat, StudyShelf } from './saving.ts';
@@ -8,7 +9,7 @@ export interface Keeping {
   readonly id: () => string;
   /** Whether this tab may change the study. */
   readonly mayChange: () => boolean;
-  /** Something has changed: it is written down at once and saved soon. */
+  /** Something has changed: it is written down at once, or when a drag rests, and saved soon. */
   readonly changed: () => void;
   /** The page now shows another study, which is not on the device yet. */
   readonly startAnew: (id: string) => void;
@@ -32,9 +33,9 @@ export interface KeepingSpec {
   readonly owned: (isMine: boolean) => void;
 }
 
-/** Wait after the last change before it is saved, ms; and the longest a change waits to be written down. */
+/** Wait after the last change before it is saved, ms; and the longest a change waits to be written down outside a drag. */
 const SAVE_AFTER_MS = 600;
-const WRITE_AFTER_MS = 80;
+const WRITE_AFTER_MS = 120;
 /** What a tab that gives a study up takes to write down what it has not saved, ms. */
 const HAND_OVER_MS = 200;
 
@@ -124,6 +125,11 @@ export function keeping(spec: KeepingSpec): Keeping {
     mayChange: () => mayChange,
     changed() {
       isDirty = true;
+      // To write takes longer than to draw: while something is dragged it waits until that rests.
+      if (isDragging()) {
+        clearTimeout(writing);
+        writing = undefined;
+      }
       writing ??= setTimeout(write, WRITE_AFTER_MS);
       clearTimeout(saving);
       saving = setTimeout(() => void save(), SAVE_AFTER_MS);

@@ -1,10 +1,10 @@
 import { h } from '../html.ts';
 import type { HtmlChild } from '../html.ts';
-import type { Graph, State, Uses, Values } from '../reactive/index.ts';
+import type { Cell, Graph, State, Uses, Values } from '../reactive/index.ts';
 import type { CellHost, CellSpec, Explained } from './cellHost.ts';
 import { cellHost } from './cellHost.ts';
 import { exchange } from './exchange.ts';
-import { frames } from './frames.ts';
+import { frames, screenFrames } from './frames.ts';
 import { lateness } from './lateness.ts';
 import { drawingActions } from './drawingFile.ts';
 import { saveTables } from './tableFile.ts';
@@ -41,6 +41,8 @@ export interface PageSpec {
 export interface SheetOptions {
   /** Puts a failure in words; the message of the error unless given. */
   readonly explain?: (error: unknown, station: string) => Explained;
+  /** Slow cells for which only those wait that show them: the others draw what has come before. */
+  readonly aside?: readonly Cell<unknown>[];
 }
 
 /** The page of a notebook: builders for its parts, all tied to one graph. */
@@ -110,8 +112,8 @@ const head = ({ title, answer, next, block }: HeadSpec): HTMLElement =>
  * A page on which cells of a graph are shown. Build cells and sections in page order, then mount them once.
  * Sections get the ids 's1', 's2' ..., cells the id of their station.
  */
-export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}): Sheet {
-  const queue = frames((run) => requestAnimationFrame(run));
+export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOptions = {}): Sheet {
+  const queue = frames(screenFrames.drawing);
   const element = h('main', { class: 'sheet' });
   const stops: (() => void)[] = [];
   let sections: readonly LineSection[] = [];
@@ -125,7 +127,12 @@ export function sheet(graph: Graph, { explain = messageOf }: SheetOptions = {}):
     graph,
     frames: queue,
     explain,
-    isBusy: () => graph.cells().some((cell) => cell.kind === 'slow' && graph.state(cell).state === 'pending'),
+    isBusy: () =>
+      graph
+        .cells()
+        .some(
+          (cell) => cell.kind === 'slow' && !aside.includes(cell) && graph.state(cell).state === 'pending',
+        ),
     homeOf: (cellName: string) => homeOf(cellName, known, (cell) => graph.uses(cell)),
     waitsFor(station: string) {
       const above = new Set(ties().get(station)?.uses);

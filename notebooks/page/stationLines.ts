@@ -4,6 +4,7 @@ import type { StationMark } from '../drawing/stationLine.ts';
 import { toDom } from '../drawing/toDom.ts';
 import { h } from '../html.ts';
 import type { CellHost } from './cellHost.ts';
+import { isDragging } from './dragging.ts';
 import type { Frames } from './frames.ts';
 import type { Ties } from './ties.ts';
 
@@ -129,7 +130,7 @@ export function stationLines(
     'pointerover',
     ({ target, pointerType }) => {
       // While something is dragged the pointer passes over cells it does not mean.
-      if (pointerType === 'touch' || document.documentElement.classList.contains('dragging')) return;
+      if (pointerType === 'touch' || isDragging()) return;
       pointed = stationAt(target);
       join();
     },

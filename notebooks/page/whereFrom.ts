@@ -6,7 +6,7 @@ import type { Ask } from './figureChain.ts';
 import type { FigureWalk } from './figureWalk.ts';
 import { figureWalk } from './figureWalk.ts';
 import { valueWords } from './figureValue.ts';
-import { frames } from './frames.ts';
+import { frames, screenFrames } from './frames.ts';
 
 export type { Ask } from './figureChain.ts';
 
@@ -50,13 +50,14 @@ const wordsOf = (figure: Element): string =>
  */
 export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => string | undefined): WhereFrom {
   const hosts = new Map<Element, Host>();
-  const queue = frames((run) => requestAnimationFrame(run));
+  const queue = frames(screenFrames.drawing);
   const listening = new AbortController();
   const { signal } = listening;
   let ask: Ask | null = null;
   let isPending = false;
 
   const figuresOf = (host: Element): Element[] => Array.from(host.querySelectorAll(FIGURES)).filter(isSeen);
+  const hasFigures = (host: Element): boolean => Array.from(host.querySelectorAll(FIGURES)).some(isSeen);
 
   const show = (): void => {
     if (ask === null) return;
@@ -133,6 +134,7 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
     const walk = element.matches('.cell')
       ? figureWalk({
           figures: () => figuresOf(element),
+          hasFigures: () => hasFigures(element),
           say,
           ask: (figure) => open(host, figure),
         })
@@ -180,15 +182,20 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
     for (const host of hosts.values()) if (host.open !== null) mark(host);
   };
   const drawn = new MutationObserver((records) => {
-    for (const { target } of records) {
+    const targets = new Set(records.map(({ target }) => target));
+    const parts = new Set<Element>();
+    for (const target of targets) {
       const part = target instanceof Element ? target.closest('.body, .notes, .live') : null;
-      if (part === null) continue;
-      queue.request(markOpen);
+      if (part !== null) parts.add(part);
+    }
+    if (parts.size === 0) return;
+    for (const part of parts) {
       const cell = part.closest('.cell');
       if (cell !== null) redrawn.add(cell);
-      clearTimeout(timer);
-      timer = setTimeout(walkAgain, PAUSE_MS);
     }
+    queue.request(markOpen);
+    clearTimeout(timer);
+    timer = setTimeout(walkAgain, PAUSE_MS);
   });
   drawn.observe(sheet, { childList: true, subtree: true });
   for (const cell of sheet.querySelectorAll('.cell')) redrawn.add(cell);

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { frames } from '../../notebooks/page/frames.ts';
+import { frames, turns } from '../../notebooks/page/frames.ts';
 
 /** A screen whose frames come when they are told to. */
 function screen() {
@@ -49,5 +49,42 @@ describe('frames', () => {
     expect(count).toBe(1);
     frame();
     expect(count).toBe(1);
+  });
+});
+
+describe('turns', () => {
+  it('hand(run) comes before drawing(run), and what it changes is drawn in the same frame', () => {
+    let runs: (() => void)[] = [];
+    const { hand, drawing } = turns((run) => runs.push(run));
+    const frame = (): void => {
+      const now = runs;
+      runs = [];
+      for (const run of now) run();
+    };
+    const seen: string[] = [];
+    const queue = frames(drawing);
+    queue.request(() => seen.push('drawn before'));
+    hand(() => {
+      seen.push('moved');
+      queue.request(() => seen.push('drawn after'));
+    });
+    expect(runs.length).toBe(1);
+    frame();
+    expect(seen).toEqual(['moved', 'drawn before', 'drawn after']);
+    expect(runs.length).toBe(0);
+  });
+
+  it('drawing(run) from inside a drawing waits for the next frame', () => {
+    const runs: (() => void)[] = [];
+    const { drawing } = turns((run) => runs.push(run));
+    const seen: string[] = [];
+    drawing(() => {
+      seen.push('first');
+      drawing(() => seen.push('second'));
+    });
+    runs.splice(0)[0]!();
+    expect(seen).toEqual(['first']);
+    runs.splice(0)[0]!();
+    expect(seen).toEqual(['first', 'second']);
   });
 });
