@@ -71,7 +71,17 @@ describe('summary(lines)', () => {
       cases,
     );
     expect(summary(lines)).toEqual([
-      { subject: 'sums', compared: 3, within: 1, outside: 1, shownOnly: 1, worstDeviation: 0.2 },
+      {
+        subject: 'sums',
+        compared: 3,
+        within: 1,
+        outside: 1,
+        shownOnly: 1,
+        worstDeviation: 0.2,
+        medianDeviation: 0,
+        withinQuarter: 1,
+        worst: { id: 'b', deviation: -0.2 },
+      },
     ]);
   });
 });
