@@ -1,0 +1,52 @@
+import { describe, expect, it } from 'vitest';
+import { appraise, memory, ratesFor, type Appraisal, type Study } from '../../lib/index.ts';
+import { workedExample, type ExampleName } from '../../notebooks/examples.ts';
+
+const kept = memory();
+const study = (name: ExampleName): Study => {
+  const whole = workedExample(name);
+  return { ...whole, books: { ...whole.books, draws: 1000 } };
+};
+/** The same study with one item at the 90 % point of its own rate: dear, and inside what was stated. */
+function dear(whole: Study, item: string): Study {
+  const { p10, p50, p90 } = ratesFor(whole.books).rates.find((rate) => rate.item === item)!;
+  const up = p90 / p50;
+  const typed = { item, p10: p10 * up, p50: p90, p90: p90 * up, reason: 'at the 90 % point of its range' };
+  return { ...whole, books: { ...whole.books, rates: [typed] } };
+}
+const leading = ({ options, standing }: Appraisal) => {
+  const group = standing.groups.find((one) => one.includes(standing.leader!))!;
+  return options.filter(({ number }) => group.includes(number));
+};
+const leader = ({ options, standing }: Appraisal) =>
+  options.find(({ number }) => number === standing.leader)!;
+
+describe('worked examples', { timeout: 120_000 }, () => {
+  it.each([
+    ['low-ferry', 'plate-girder-steel'],
+    ['stonebeck-lane', 'precast-concrete'],
+    ['tanners-yard', 'plate-girder-steel'],
+  ] as const)(
+    '%s is open: two families lead together, and %s at the dear end of its range changes who leads',
+    (name, item) => {
+      const before = appraise(study(name), kept);
+      expect(new Set(leading(before).map(({ family }) => family)).size).toBeGreaterThanOrEqual(2);
+      const after = appraise(dear(study(name), item), kept);
+      expect(leader(after).form).not.toBe(leader(before).form);
+    },
+  );
+
+  it('sarrow-estuary has options of several families that the rules let in, long units with approaches among them', () => {
+    const { options } = appraise(study('sarrow-estuary'), kept);
+    const possible = options.filter(({ status }) => status !== 'out');
+    expect(new Set(possible.map(({ family }) => family))).toEqual(
+      new Set(['cable-supported', 'box', 'truss']),
+    );
+    for (const { units } of possible) {
+      const forms = new Set(units.map(({ form }) => form));
+      expect(forms.size).toBeGreaterThan(1);
+      for (const { supportsM } of units)
+        for (const x of supportsM) expect(x <= 2565 || x >= 2815, `support at ${x}`).toBe(true);
+    }
+  });
+});
