@@ -81,8 +81,14 @@ export function odds(share: number): string {
   return String(Math.round(share * 20) * 5);
 }
 
-/** Spans as they are said: '70 + 90 + 70'. */
-export const spansText = (spansM: readonly number[]): string => spansM.map(length).join(' + ');
+/** More spans than this are counted instead of listed. */
+const LISTED_SPANS = 10;
+
+/** Spans as they are said: '70 + 90 + 70', of many '20 spans up to 272'. */
+export const spansText = (spansM: readonly number[]): string =>
+  spansM.length > LISTED_SPANS
+    ? `${String(spansM.length)} spans up to ${length(Math.max(...spansM))}`
+    : spansM.map(length).join(' + ');
 
 /** A list in words: 'a, b and c'. */
 export function listed(words: readonly string[]): string {

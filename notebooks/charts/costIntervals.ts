@@ -37,6 +37,9 @@ export function groupOdds(group: readonly number[], standing: Standing): string 
   return low === high ? `${low} % either way` : `${low} to ${high} %, either way round`;
 }
 
+/** The widest word beside a bracket, px. */
+const WORDS_PX = 58;
+
 /** Brackets at the right of runs that cannot be separated; runs that overlap stand side by side, their words below one another. */
 function brackets(
   rows: readonly AppraisedOption[],
@@ -58,14 +61,17 @@ function brackets(
   const ends: number[] = [];
   const lanes = runs.map(({ from, to }) => {
     const free = ends.findIndex((end) => end < from);
-    const lane = free < 0 ? ends.length : free;
-    ends[lane] = to;
-    return lane;
+    const own = free < 0 ? ends.length : free;
+    ends[own] = to;
+    return own;
   });
-  const wordsX = x + (Math.max(1, ends.length) - 1) * 9 + 8;
+  // Many brackets side by side stand closer, so that their words keep room.
+  const besides = Math.max(1, ends.length) - 1;
+  const lane = besides === 0 ? 0 : Math.min(9, (room - 8 - WORDS_PX) / besides);
+  const wordsX = x + besides * lane + 8;
   let lastFoot = -Infinity;
   return runs.map(({ group, from, to }, index) => {
-    const left = x + (lanes[index] ?? 0) * 9;
+    const left = x + (lanes[index] ?? 0) * lane;
     const top = yOf(from) - pitch * 0.32;
     const bottom = yOf(to) + pitch * 0.32;
     const heads = wrapText('cannot be separated', room - (wordsX - x), letters.drawing, 600);

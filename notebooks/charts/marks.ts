@@ -31,8 +31,10 @@ export function limitLine(
   accent: string,
   right: number,
 ): Piece {
-  const width = textWidth(words, letters.table, 600);
-  const turned = x + 6 + width > right;
+  const fits = (said: string): boolean => textWidth(said, letters.table, 600) + 6 <= Math.max(right - x, x);
+  // On a narrow sheet only what stands before the colon.
+  const written = fits(words) ? words : (words.split(':')[0] ?? words);
+  const turned = x + 6 + textWidth(written, letters.table, 600) > right;
   return g(
     { class: 'limit' },
     el('path', {
@@ -41,7 +43,7 @@ export function limitLine(
       'stroke-width': pens.heavy,
       fill: 'none',
     }),
-    label(turned ? x - 5 : x + 5, top + 9, words, {
+    label(turned ? x - 5 : x + 5, top + 9, written, {
       size: letters.table,
       weight: 600,
       fill: accent,

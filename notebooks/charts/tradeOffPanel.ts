@@ -114,7 +114,8 @@ export function panel(
     y: y(option.cost.p50),
   }));
   const offs = standOff(places, input.reference, right, input.budget === null ? null : y(input.budget), {
-    top,
+    // Clear of the name of the panel.
+    top: top + 8,
     bottom,
   });
   const path = (run: readonly (readonly [number, number])[]): string =>

@@ -57,9 +57,12 @@ export interface CrossingInput {
   readonly prefix?: string;
 }
 
-/** A span with what it has changed by, where there is room for both. */
-const withChange = (figure: string, change: string, spanM: number, frame: Frame): string =>
-  textWidth(figure + change, letters.table) + 6 < spanM * frame.pxPerM ? figure + change : figure;
+/** A span with what it has changed by where there is room for both; nothing where it would touch its neighbours. */
+function withChange(figure: string, change: string, spanM: number, frame: Frame, size: number): string {
+  const room = spanM * frame.pxPerM;
+  if (textWidth(figure + change, letters.table) + 6 < room) return figure + change;
+  return textWidth(figure, size) < room || room > 26 ? figure : '';
+}
 
 /** Gradient of a straight road at its left end; over a crest those at both abutments with its radius. */
 function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
@@ -237,7 +240,13 @@ export function crossing(input: CrossingInput): Piece {
           inside.map(frame.x),
           dimensionBottom,
           figures.map((figure, i) =>
-            withChange(figure, changes[i] ?? '', (inside[i + 1] ?? 0) - (inside[i] ?? 0), frame),
+            withChange(
+              figure,
+              changes[i] ?? '',
+              (inside[i + 1] ?? 0) - (inside[i] ?? 0),
+              frame,
+              dimensionSize,
+            ),
           ),
           {
             weight: 600,

@@ -167,16 +167,13 @@ export function names(site: Site, room: Room): (Piece | null)[] {
       const middle = (zone.fromM + zone.toM) / 2;
       if (middle < frame.fromM || middle > frame.toM) return null;
       const y = frame.y(groundLevel(site, middle));
+      const half = textWidth(zone.name, letters.drawing) / 2;
+      const onSheet = (x: number): number =>
+        Math.min(Math.max(x, frame.left + half), Math.max(frame.right - half, frame.left + half));
       const places = [16, 20, 28].flatMap((down) =>
-        [0, -24, 24, -48].map((shift) => [frame.x(middle) + shift, y + down] as const),
+        [0, -24, 24, -48].map((shift) => [onSheet(frame.x(middle) + shift), y + down] as const),
       );
-      return freeLabel(
-        room,
-        places,
-        zone.name,
-        { italic: true, anchor: 'middle', fill: colours.second },
-        Infinity,
-      );
+      return freeLabel(room, places, zone.name, { italic: true, anchor: 'middle', fill: colours.second });
     });
   return [...river, ...ways];
 }

@@ -27,6 +27,8 @@ export interface PlanInput {
 
 /** Ground shown beside the widest thing that stands in the strip, m. */
 const BESIDE_M = 9;
+/** Footings and piles are drawn where a metre is more than this, px: at 1:2500 and larger. */
+const FOUNDED_PX = 1;
 /** Track: gauge and length of a sleeper, m. */
 const GAUGE_M = 1.5;
 const SLEEPER_M = 2.6;
@@ -181,13 +183,14 @@ function supportPiece(strip: Strip, support: Support): Piece {
   );
   return g(
     { fill: 'none' },
-    foundation !== null &&
+    strip.ppm > FOUNDED_PX &&
+      foundation !== null &&
       el('path', {
         d: body(strip, at, foundation.footing.lengthM, foundation.footing.widthM),
         'stroke-width': pens.fine,
         'stroke-dasharray': '4.6 2.8',
       }),
-    foundation !== null && piles(strip, at, foundation),
+    strip.ppm > FOUNDED_PX && foundation !== null && piles(strip, at, foundation),
     el('path', { d: columns.join(''), 'stroke-width': pens.thin, 'stroke-dasharray': '4.6 2.8' }),
   );
 }
@@ -207,6 +210,22 @@ function deckPiece(site: Site, option: AppraisedOption, strip: Strip, ink: FormI
     });
   });
   return g({}, faces);
+}
+
+/** Names of what is crossed, the widest first; one that would touch another is left out. */
+function zoneNames(zones: readonly Zone[], xOf: (zone: Zone) => number, ppm: number, y: number): Piece[] {
+  const wide = ({ fromM, toM }: Zone): number => (toM - fromM) * ppm;
+  const taken: { readonly from: number; readonly to: number }[] = [];
+  return [...zones]
+    .sort((a, b) => wide(b) - wide(a))
+    .flatMap((zone) => {
+      const half = textWidth(zone.name, letters.drawing) / 2;
+      const x = xOf(zone);
+      if (2 * half >= wide(zone) + 60) return [];
+      if (taken.some(({ from, to }) => x - half < to + 6 && x + half > from - 6)) return [];
+      taken.push({ from: x - half, to: x + half });
+      return [label(x, y, zone.name, { anchor: 'middle', italic: true, halo: true })];
+    });
 }
 
 /**
@@ -280,14 +299,7 @@ export function plan(input: PlanInput): Piece {
           'stroke-dasharray': '14 2.8 2 2.8',
         }),
       ),
-      shown.map((zone) => {
-        const middle = frame.x((zone.fromM + zone.toM) / 2 - halfM * lean * 0.9);
-        const room = (zone.toM - zone.fromM) * ppm;
-        return (
-          textWidth(zone.name, letters.drawing) < room + 60 &&
-          label(middle, bottom - 5, zone.name, { anchor: 'middle', italic: true, halo: true })
-        );
-      }),
+      zoneNames(shown, (zone) => frame.x((zone.fromM + zone.toM) / 2 - halfM * lean * 0.9), ppm, bottom - 5),
       option === null
         ? null
         : label(frame.x(site.startM) + 6, y(site.deck.widthM / 2) - 5, `${length(site.deck.widthM)} m`, {
@@ -296,7 +308,11 @@ export function plan(input: PlanInput): Piece {
           }),
       words !== '' && label(0, 11, words, { fill: colours.second }),
       withBar &&
-        scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 26, { rightPx: widthPx, heights: false }),
+        scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 26, {
+          rightPx: widthPx,
+          widthPx: Math.min(400, widthPx * 0.7),
+          heights: false,
+        }),
     ],
   );
 }

@@ -16,6 +16,8 @@ const marks: Readonly<Record<Scale, readonly number[]>> = {
   2000: [0, 20, 40, 100, 200],
   2500: [0, 20, 40, 100, 200],
   5000: [0, 50, 100, 200, 500],
+  10000: [0, 100, 200, 500, 1000],
+  20000: [0, 200, 500, 1000, 2000],
 };
 
 export interface ScaleBarStyle {

@@ -140,12 +140,12 @@ export function sectionRow(input: SectionRowInput): Piece {
   }
   return sheet(
     widthPx,
-    y + 26,
+    y + (widthPx < 480 ? 40 : 26),
     `Cross-sections of ${String(drawn.length)} options on one road level, 1 to ${String(scale)}`,
     [
       ink.defs.length > 0 && el('defs', {}, ink.defs),
       rows,
-      scaleBar(scale, 8, y + 12, { heights: false, what: 'sections', widthPx: 320 }),
+      scaleBar(scale, 8, y + 12, { heights: false, what: 'sections', widthPx: 320, rightPx: widthPx }),
     ],
   );
 }

@@ -11,6 +11,9 @@ import { rowHeight, stackFoot, stackHead, wideStack } from './wideStack.ts';
 
 export type { StackInput } from './stackSheet.ts';
 
+/** Where the axis of cost starts, right of the elevations, px. */
+const costStart = 100;
+
 /** What all rows share, and the width of the elevations. */
 function layOut(input: StackInput): {
   readonly shared: StackSheet;
@@ -38,7 +41,8 @@ function layOut(input: StackInput): {
     shown: chainagesShown(input.site, bodyPx, scale),
     axis: narrow
       ? linearAxis(values, 4, input.widthPx - 4)
-      : linearAxis(values, bodyPx + 30, input.widthPx - 8, 7),
+      : // Right of the prices per m2, so that the line of the budget does not run through them.
+        linearAxis(values, bodyPx + costStart, input.widthPx - 8, 6),
     unit: moneyUnit(input.currency, largest),
   };
   return { shared, bodyPx, narrow };

@@ -9,6 +9,7 @@ import {
   deviceCupboard,
   openFile,
   pagesFrom,
+  pushed,
   sheet,
   studyShelf,
   type StoredStudy,
@@ -29,7 +30,7 @@ function exampleCell(name: ExampleName, widthPx: number): HTMLElement {
     { class: 'example' },
     h('p', {}, h('a', { class: 'title', href: `./option-study.html?example=${name}` }, title)),
     h('p', { class: 'small' }, exampleWords(site)),
-    h('div', { class: 'pushed' }, smallCrossing(site, scale, `example-${name}`)),
+    pushed(`What ${title} has to cross`, smallCrossing(site, scale, `example-${name}`)),
     drawingSheet(360, 44, `Scale bar, 1 to ${String(scale)}`, [
       scaleBar(scale, 14, 18, { widthPx: 200, rightPx: 340 }),
     ]),

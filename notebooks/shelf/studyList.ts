@@ -3,7 +3,7 @@ import { scaleBar } from '../drawing/scaleBar.ts';
 import { sheet } from '../drawing/sheet.ts';
 import { fixed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
-import { fileName, saveFile, type StoredStudy } from '../page/index.ts';
+import { fileName, pushed, saveFile, type StoredStudy } from '../page/index.ts';
 import { savedAtWords, type KeptStudy } from './kept.ts';
 import { smallCrossing } from './smallCrossing.ts';
 
@@ -39,7 +39,7 @@ function row({ stored, read }: KeptStudy, index: number, spec: StudyListSpec): H
         ? [
             h('a', { class: 'title', href: studyHref(id) }, title),
             h('span', { class: 'long' }, `${fixed(read.site.lengthM, 0)} m`),
-            h('div', { class: 'pushed' }, smallCrossing(read.site, SCALE, `kept-${String(index)}`)),
+            pushed(`What ${title} has to cross`, smallCrossing(read.site, SCALE, `kept-${String(index)}`)),
           ]
         : [
             h('span', { class: 'title' }, title),

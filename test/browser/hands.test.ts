@@ -1,43 +1,16 @@
 import type { Page } from 'playwright-core';
-import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import { beforeAll, describe, expect, it } from 'vitest';
 import example from '../../data/examples/low-ferry.json' with { type: 'json' };
-import { openSite, type Heard, type Site } from './site.ts';
+import { oneStudyPage, settled } from './studyPage.ts';
 
-let site: Site;
+const study = oneStudyPage();
 let page: Page;
-let heard: Heard;
-
-/** A cell says only after 150 ms that it waits: what is seen before that may be of the study before. */
-const SAYS_SO_MS = 250;
-
-const settled = async (): Promise<void> => {
-  await page.waitForTimeout(SAYS_SO_MS);
-  await page.waitForFunction(
-    () => [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
-    undefined,
-    { timeout: 60_000 },
-  );
-};
+beforeAll(() => {
+  ({ page } = study);
+});
 
 const CROSSING = '[id="1+020"]';
 const STACK = '[id="3+020"]';
-
-// One page for all: each test takes back what it has done.
-beforeAll(async () => {
-  site = await openSite();
-  ({ page, heard } = await site.open('option-study.html'));
-  await page.waitForSelector('[data-option]', { timeout: 60_000 });
-  await settled();
-});
-afterEach(async () => {
-  await page.mouse.up();
-  const undo = page.getByRole('button', { name: 'Undo', exact: true });
-  while (await undo.isEnabled()) await undo.click();
-  await settled();
-  expect(heard.console).toEqual([]);
-  expect(heard.elsewhere).toEqual([]);
-});
-afterAll(() => site.close());
 
 const handle = (key: string, cell = CROSSING) => page.locator(`${cell} [data-handle="${key}"]`);
 const valueOf = async (key: string, cell = CROSSING): Promise<number> =>
@@ -83,14 +56,14 @@ describe.each([
       [said, price],
     );
     await page.mouse.up();
-    await settled();
+    await settled(page);
     const after = await valueOf('pier/1', cell);
     expect(after).toBeGreaterThan(before + 3);
     expect(await page.locator(`${cell} .free`).count()).toBe(0);
     await undoIs('Undo moving a pier');
     expect(await textOf('[id="3+010"]')).toContain('is kept by hand');
     await page.getByRole('button', { name: 'Undo', exact: true }).click();
-    await settled();
+    await settled(page);
     expect(await valueOf('pier/1', cell)).toBe(before);
     expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
   });
@@ -103,7 +76,7 @@ describe('by hand', () => {
     await changed('pier/1', before);
     await page.keyboard.press('Escape');
     await page.mouse.up();
-    await settled();
+    await settled(page);
     expect(await valueOf('pier/1')).toBe(before);
     expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
   });
@@ -119,7 +92,7 @@ describe('by hand', () => {
       document.querySelector('[id="1+020"] svg')?.textContent.includes('P2 may not stand here: River Wend'),
     );
     await page.mouse.up();
-    await settled();
+    await settled(page);
     expect(await textOf(`${CROSSING} svg`)).toContain('P2 may not stand here: River Wend');
     expect(await textOf(`${CROSSING} .notes`)).toContain('Not as it stands.');
     expect(await textOf(`${STACK} .row.reference`)).toContain('reference, out');
@@ -140,7 +113,7 @@ describe('by hand', () => {
       [`${CROSSING} [data-handle="pier/1"]`, String(before - 4)],
     );
     await page.keyboard.press('Escape');
-    await settled();
+    await settled(page);
     expect(await valueOf('pier/1')).toBe(before);
     expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
     expect(await page.evaluate(() => document.activeElement?.getAttribute('data-handle'))).toBe('pier/1');
@@ -153,7 +126,7 @@ describe('by hand', () => {
     await page.keyboard.press('Enter');
     await changed('span/0', before, STACK);
     expect(await valueOf('span/0', STACK)).toBe(before + 2);
-    await settled();
+    await settled(page);
     await handle('span/0', STACK).locator('.grip').click();
     await page.keyboard.type('900');
     await page.keyboard.press('Enter');
@@ -167,17 +140,17 @@ describe('by hand', () => {
     const before = await valueOf('pier/1');
     await page.getByRole('button', { name: 'Lock P1' }).click();
     await page.waitForSelector(`${CROSSING} .handle.locked`);
-    await settled();
+    await settled(page);
     await pull('pier/1', 24, 0);
     await page.mouse.up();
     await handle('pier/1').focus();
     await page.keyboard.press('ArrowRight');
-    await settled();
+    await settled(page);
     expect(await valueOf('pier/1')).toBe(before);
     expect(await textOf(`${CROSSING} .hand-said`)).toContain('Locked');
     await page.keyboard.press('l');
     await page.waitForSelector(`${CROSSING} .handle.locked`, { state: 'detached' });
-    await settled();
+    await settled(page);
   });
 
   it.each([
@@ -190,7 +163,7 @@ describe('by hand', () => {
     await pull(key, dx, dy);
     await changed(key, before);
     await page.mouse.up();
-    await settled();
+    await settled(page);
     expect(await valueOf(key)).not.toBe(before);
     expect(await textOf(`[id="${station}"] .body`)).not.toBe(brief);
   });
@@ -201,14 +174,14 @@ describe('by hand', () => {
     await pull('depth', 0, 10);
     await changed('depth', before);
     await page.mouse.up();
-    await settled();
+    await settled(page);
     const after = await valueOf('depth');
     // Levels move by a quarter of what the pointer does, on multiples of five centimetres.
     const geared = before + 0.25 * 10 * pxM;
     expect(after).toBeCloseTo(Math.round(geared / 0.05) * 0.05, 6);
     await page.getByRole('button', { name: 'Depth of least cost' }).click();
     await changed('depth', after);
-    await settled();
+    await settled(page);
     expect(await valueOf('depth')).toBeCloseTo(before, 1);
     await page.getByRole('button', { name: 'Give it back to the search' }).click();
     await page.waitForFunction(() =>
@@ -217,18 +190,18 @@ describe('by hand', () => {
   });
 
   it('a form that a rule puts out is worked out anyway, and left out again', async () => {
-    const study = structuredClone(example) as { options: { forms: string[] } };
-    study.options.forms = ['composite-i', 'slab'];
+    const twoForms = structuredClone(example) as { options: { forms: string[] } };
+    twoForms.options.forms = ['composite-i', 'slab'];
     const [chooser] = await Promise.all([
       page.waitForEvent('filechooser'),
       page.getByRole('button', { name: 'Open', exact: true }).click(),
     ]);
-    const buffer = Buffer.from(JSON.stringify(study));
+    const buffer = Buffer.from(JSON.stringify(twoForms));
     await chooser.setFiles({ name: 'study.json', mimeType: 'application/json', buffer });
     await page.waitForFunction(() =>
       document.querySelector('[id="3+020"]')?.textContent.includes('work it out anyway'),
     );
-    await settled();
+    await settled(page);
     await page.locator(`${STACK} summary`, { hasText: 'arrangements dropped' }).click();
     const ask = page.locator(`${STACK} button`, { hasText: 'work it out anyway' }).first();
     const name = (await ask.getAttribute('aria-label'))!.split(':')[0]!;
@@ -237,7 +210,7 @@ describe('by hand', () => {
       (form) => document.querySelector('[id="3+020"]')?.textContent.includes(`${form} is worked out`),
       name,
     );
-    await settled();
+    await settled(page);
     await page.locator(`${STACK} button`, { hasText: 'leave it out again' }).first().click();
     await page.waitForFunction(
       (form) => !document.querySelector('[id="3+020"]')?.textContent.includes(`${form} is worked out`),

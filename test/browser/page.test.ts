@@ -1,26 +1,42 @@
-import { readFileSync } from 'node:fs';
-import { resolve } from 'node:path';
+import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join, resolve } from 'node:path';
 import { chromium } from 'playwright-core';
 import type { Browser, Locator, Page } from 'playwright-core';
-import { createServer } from 'vite';
-import type { ViteDevServer } from 'vite';
+import { build, preview } from 'vite';
+import type { PreviewServer } from 'vite';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { findChromium } from '../../.config/chromium.mjs';
 import type { Trial } from './pages/page.ts';
 
 const root = resolve(import.meta.dirname, '../..');
-let server: ViteDevServer;
+/** The trial page is built: served file by file it takes seconds to load before each test. */
+const outDir = mkdtempSync(join(tmpdir(), 'page-'));
+let server: PreviewServer;
 let browser: Browser;
 let page: Page;
 
 beforeAll(async () => {
-  server = await createServer({
+  await build({
     root,
     configFile: false,
     logLevel: 'silent',
-    server: { port: 0, host: '127.0.0.1', hmr: false, watch: null },
+    publicDir: false,
+    build: {
+      outDir,
+      emptyOutDir: true,
+      target: 'es2022',
+      assetsInlineLimit: 0,
+      rolldownOptions: { input: resolve(root, 'test/browser/pages/page.html') },
+    },
   });
-  await server.listen();
+  server = await preview({
+    root,
+    configFile: false,
+    logLevel: 'silent',
+    build: { outDir },
+    preview: { port: 0, host: '127.0.0.1' },
+  });
   browser = await chromium.launch({
     executablePath: await findChromium(),
     args: ['--no-sandbox', '--disable-gpu'],
@@ -31,6 +47,7 @@ beforeAll(async () => {
 afterAll(async () => {
   await browser.close();
   await server.close();
+  rmSync(outDir, { recursive: true, force: true });
 });
 
 type Tried = Window & { readonly trial: Trial };
@@ -134,6 +151,7 @@ describe('the two lines', () => {
 describe('a figure in place', () => {
   const told = (): Promise<(readonly [string, unknown])[]> => trial((tried) => [...tried.told]);
   const drag = async (by: number, { release = true } = {}): Promise<void> => {
+    await field('depth at midspan').scrollIntoViewIfNeeded();
     const box = (await field('depth at midspan').boundingBox())!;
     const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
     await page.mouse.move(x, y);

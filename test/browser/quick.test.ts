@@ -1,34 +1,12 @@
+import { beforeAll, describe, expect, it } from 'vitest';
 import type { Page } from 'playwright-core';
-import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { openSite, type Heard, type Site } from './site.ts';
+import { oneStudyPage, settled } from './studyPage.ts';
 
-let site: Site;
+const study = oneStudyPage();
 let page: Page;
-let heard: Heard;
-
-beforeAll(async () => {
-  site = await openSite();
+beforeAll(() => {
+  ({ page } = study);
 });
-afterAll(() => site.close());
-
-beforeEach(async () => {
-  ({ page, heard } = await site.open('option-study.html'));
-  await page.waitForSelector('[data-option]', { timeout: 60_000 });
-  await settled();
-  return async () => {
-    expect(heard.console).toEqual([]);
-    expect(heard.elsewhere).toEqual([]);
-    await page.context().close();
-  };
-});
-
-const settled = async (): Promise<void> => {
-  await page.waitForFunction(
-    () => [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
-    undefined,
-    { timeout: 60_000 },
-  );
-};
 
 const crossingNote = (): Promise<string | null> =>
   page.locator('[id="1+020"] .notes').evaluate((notes) => notes.textContent);
@@ -77,7 +55,7 @@ describe('while a figure is dragged', () => {
       (words) => !document.querySelector('[id="1+020"] .notes')?.textContent.includes(words),
       held,
     );
-    await settled();
+    await settled(page);
   });
 
   it('steel rate: the price of the reference follows beside the rate, and the whole is one step of undo', async () => {
@@ -86,7 +64,7 @@ describe('while a figure is dragged', () => {
     await pull('steel rate', 60);
     expect((await whileHeld()).rates).not.toBe(before);
     await page.mouse.up();
-    await settled();
+    await settled(page);
     await page.keyboard.press('Escape');
     await page.getByRole('button', { name: 'Undo' }).click();
     await page.waitForFunction(

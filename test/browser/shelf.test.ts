@@ -2,7 +2,8 @@ import { readFile } from 'node:fs/promises';
 import { resolve } from 'node:path';
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { openSite, type Heard, type Site } from './site.ts';
+import { openSite, type Site } from './site.ts';
+import { settled, silent } from './studyPage.ts';
 
 const example = resolve(import.meta.dirname, '../../data/examples/low-ferry.json');
 
@@ -12,10 +13,6 @@ beforeAll(async () => {
 });
 afterAll(() => site.close());
 
-const silent = (heard: Heard): void => {
-  expect(heard.console).toEqual([]);
-  expect(heard.elsewhere).toEqual([]);
-};
 const rows = (page: Page): Promise<string[]> => page.locator('.study .title').allTextContents();
 
 /** Opens a file from the shelf and comes back to the shelf. */
@@ -46,6 +43,13 @@ describe('shelf', () => {
     expect(await page.getByRole('link', { name: 'open a worked example' }).getAttribute('href')).toBe(
       './option-study.html',
     );
+    silent(heard);
+  });
+
+  it('leads to a study that is worked out', async () => {
+    const { page, heard } = await site.open('index.html');
+    await page.getByRole('link', { name: 'open a worked example' }).click();
+    await settled(page);
     silent(heard);
   });
 
