@@ -90,6 +90,10 @@ export const spansText = (spansM: readonly number[]): string =>
     ? `${String(spansM.length)} spans up to ${length(Math.max(...spansM))}`
     : spansM.map(length).join(' + ');
 
+/** Spans inside a sentence: 'spans 70 + 90 + 70', of many '20 spans up to 272'. */
+export const spansPhrase = (spansM: readonly number[]): string =>
+  `${spansM.length > LISTED_SPANS ? '' : 'spans '}${spansText(spansM)}`;
+
 /** A list in words: 'a, b and c'. */
 export function listed(words: readonly string[]): string {
   if (words.length < 2) return words.join('');

@@ -44,6 +44,10 @@ export function optionMark(
   );
 }
 
+/** Why a rule puts an option out, in one line; '' where none does. */
+export const outBecause = ({ rulings }: AppraisedOption): string =>
+  [...new Set(rulings.filter(({ effect }) => effect === 'out').flatMap(({ because }) => because))].join('; ');
+
 /** What keeps an option from leading, or what speaks for it, in one line. */
 function why(
   option: AppraisedOption,

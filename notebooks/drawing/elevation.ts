@@ -1,4 +1,4 @@
-import { spansText, level } from '../format.ts';
+import { level, spansPhrase } from '../format.ts';
 import type { FormInk } from '../forms/formInk.ts';
 import { formInk } from '../forms/formInk.ts';
 import { formLooks } from '../forms/formLook.ts';
@@ -108,7 +108,7 @@ export interface ElevationInput {
 
 /** One sentence that names an option for readers who cannot see the drawing. */
 export const optionWords = (option: AppraisedOption): string =>
-  `option ${String(option.number)}, ${formLooks[option.form].short.toLowerCase()}, spans: ${spansText(spansOf(option))} m, ${level(option.depthM.midspan)} m deep`;
+  `option ${String(option.number)}, ${formLooks[option.form].short.toLowerCase()}, ${spansPhrase(spansOf(option))} m, ${level(option.depthM.midspan)} m deep`;
 
 /** Elevation of one option to true scale, without dimensions. */
 export function elevation(input: ElevationInput): Piece {

@@ -166,12 +166,15 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
 }
 
 function axisHead(shared: StackSheet, y: number, right: number): Piece {
-  const { axis, unit } = shared;
+  const { axis, input, unit } = shared;
+  // A figure under the line of the budget could not be read.
+  const limit = input.budget === null ? NaN : axis.x(input.budget);
   return g(
     { class: 'axis' },
     axis.ticks.map(
       (tick) =>
         axis.x(tick) < right - 26 &&
+        !(Math.abs(axis.x(tick) - limit) < 9) &&
         label(axis.x(tick), y, String(tick / unit.per), { anchor: 'middle', fill: colours.second }),
     ),
     label(right, y, unit.label, { anchor: 'end', fill: colours.second }),

@@ -1,120 +1,21 @@
-import { ruledOut } from '../../lib/index.ts';
-import type { Appraisal, FormId, Site } from '../../lib/index.ts';
+import type { Appraisal, Site } from '../../lib/index.ts';
 import { crossing } from '../drawing/crossing.ts';
 import { chooseReference, listenToStack, type ChooseReference } from '../drawing/listenToStack.ts';
 import { largestScale, pxPerMetre } from '../drawing/scale.ts';
 import { stack, stackOnPaper } from '../drawing/stack.ts';
-import { formLooks } from '../forms/formLook.ts';
-import { fixed, listed } from '../format.ts';
-import { h, type HtmlChild } from '../html.ts';
+import { fixed } from '../format.ts';
+import { h } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
 import { riverTable } from './riverTable.ts';
 import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
 import { byHand } from './byHand.ts';
+import { anywayWords, droppedTable, droppedTotal } from './droppedTable.ts';
 import { handsOn } from './handsOn.ts';
+import { outTable } from './outTable.ts';
 import { studyDesk } from './studyDesk.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
-
-const droppedTotal = ({ droppedCounts }: Appraisal): number =>
-  droppedCounts.reduce((sum, dropped) => sum + dropped.count, 0);
-
-/** The study with a form worked out although a rule puts it out, or left out again. */
-const anyway = (store: StudyStore, form: FormId, isAsked: boolean): void =>
-  store.edit(
-    (study) => {
-      const others = study.options.workOutAnyway.filter((one) => one !== form);
-      const workOutAnyway = isAsked ? [...others, form] : others;
-      return { ...study, options: { ...study.options, workOutAnyway } };
-    },
-    { what: isAsked ? 'working a form out anyway' : 'leaving a form out' },
-  );
-
-/** What may be done about a form that the rules put out. */
-function anywayAction(store: StudyStore, form: FormId, isAsked: boolean): HTMLElement {
-  const words = isAsked ? 'leave it out again' : 'work it out anyway';
-  return h(
-    'button',
-    {
-      type: 'button',
-      class: 'action list',
-      'data-key': `anyway.${form}`,
-      'aria-label': `${formLooks[form].short}: ${words}`,
-      onclick: () => anyway(store, form, !isAsked),
-    },
-    words,
-  );
-}
-
-/** Forms worked out against the rules, each with the way back. */
-function anywayWords(store: StudyStore, { site, options }: Appraisal): HtmlChild {
-  const { workOutAnyway } = store.valid().options;
-  const against = workOutAnyway.filter((form) => ruledOut(site, form).length > 0);
-  return against.map((form) => {
-    const numbers = options.filter((option) => option.form === form).map(({ number }) => String(number));
-    const as = numbers.length === 0 ? '' : ` as option ${listed(numbers)}`;
-    return h(
-      'p',
-      { class: 'small' },
-      `${formLooks[form].short} is worked out${as} although ${ruledOut(site, form).join('; ')}; it never leads. `,
-      anywayAction(store, form, true),
-    );
-  });
-}
-
-/** What was not worked out, by form and reason. */
-function droppedTable(appraisal: Appraisal, store: StudyStore): HTMLElement {
-  const { workOutAnyway } = store.valid().options;
-  const isOut = (form: FormId): boolean =>
-    !workOutAnyway.includes(form) && ruledOut(appraisal.site, form).length > 0;
-  const rows = [
-    ...appraisal.dropped.map(({ form, because }) => ({
-      form,
-      reason: because.join('; '),
-      count: null,
-      figure: undefined,
-    })),
-    ...appraisal.droppedCounts.map((one, i) => ({ ...one, figure: `droppedCounts/${i}/count` })),
-  ];
-  return h(
-    'details',
-    { class: 'behind' },
-    h('summary', {}, `The ${fixed(droppedTotal(appraisal), 0)} arrangements dropped, by reason`),
-    h(
-      'table',
-      {},
-      h(
-        'thead',
-        {},
-        h(
-          'tr',
-          {},
-          ['form', 'reason', 'arrangements'].map((word) => h('th', { scope: 'col' }, word)),
-        ),
-      ),
-      h(
-        'tbody',
-        {},
-        rows.map(({ form, reason, count, figure }) =>
-          h(
-            'tr',
-            {},
-            h('th', { scope: 'row' }, formLooks[form].short),
-            h('td', { class: 'text' }, reason),
-            h(
-              'td',
-              { 'data-figure': figure },
-              count === null
-                ? ['form dropped', isOut(form) && [' ', anywayAction(store, form, false)]]
-                : fixed(count, 0),
-            ),
-          ),
-        ),
-      ),
-    ),
-  );
-}
 
 /** Section 3: every option drawn on one chainage and one scale, with its cost beside it. */
 export function arrangementSection(
@@ -145,6 +46,18 @@ export function arrangementSection(
     dropped = { of, element };
     return element;
   };
+  /** Options that are out, the reference aside: the same while something is dragged, and open as it was left. */
+  let out: { readonly of: Appraisal; readonly but: number | null; readonly element: HTMLElement } | null =
+    null;
+  const outOf = (of: Appraisal, but: number | null): HTMLElement | null => {
+    if (out?.of === of && out.but === but) return out.element;
+    const options = of.options.filter(({ status, number }) => status === 'out' && number !== but);
+    if (options.length === 0) return null;
+    const element = outTable(options, of.currency);
+    if (out?.element.hasAttribute('open') === true) element.setAttribute('open', '');
+    out = { of, but, element };
+    return element;
+  };
   const stackCell = page.cell({
     station: '3+020',
     title: 'Arrangements',
@@ -155,7 +68,10 @@ export function arrangementSection(
     long: true,
     body: (v, room) => {
       if (v.stacked === null) return null;
-      const { options: drawn, movedNumber } = v.stacked;
+      const { options: all, movedNumber } = v.stacked;
+      const reference = v.stacked.reference?.number ?? null;
+      const inside = all.filter(({ status, number }) => status !== 'out' || number === reference);
+      const drawn = inside.length > 0 ? inside : all;
       const { site, standing, currency } = v.stacked.appraisal;
       const within = Object.fromEntries(
         Object.entries(standing.within).filter(([number]) => Number(number) !== movedNumber),
@@ -166,12 +82,17 @@ export function arrangementSection(
         standing: { ...standing, within },
         budget: budgetOf(v.brief),
         currency,
-        reference: v.stacked.reference?.number ?? null,
+        reference,
         widthPx: room.widthPx,
         prefix: 'stack',
       };
       if (room.isPaper) return stackOnPaper(input).map((part) => h('div', { class: 'part' }, part));
-      return [stack({ ...input, hands: v.hands }), droppedBy(v.stacked.appraisal)];
+      const { appraisal: of } = v.stacked;
+      return [
+        stack({ ...input, hands: v.hands }),
+        drawn.length < all.length && outOf(of, reference),
+        droppedBy(of),
+      ];
     },
   });
   listenToStack(stackCell.element);

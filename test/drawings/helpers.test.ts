@@ -69,6 +69,7 @@ describe('figures as printed', () => {
     expect([signed(0.2, 1), signed(-1.3, 1), signed(0.01, 1)]).toEqual(['+0.2', '\u22121.3', '0.0']);
     expect([chainage(1240), chainage(1323.5)]).toEqual(['1\u2009240', '1\u2009323.5']);
     expect(spansText([70, 90.5, 70])).toBe('70 + 90.5 + 70');
+    expect(spansText([...Array<number>(11).fill(58.5), 272])).toBe('12 spans up to 272');
     expect(listed(['1', '2', '3'])).toBe('1, 2 and 3');
   });
   it('moneyUnit(currency, largest) turns to thousands below a million', () => {
@@ -87,7 +88,8 @@ describe('scale', () => {
     expect(largestScale(12.5, 640)).toBe(100);
     expect(largestScale(230, 980, 500)).toBe(1000);
     expect(largestScale(260, 980, 500)).toBe(2000);
-    expect(largestScale(9000, 980)).toBe(5000);
+    expect(largestScale(1400, 980)).toBe(10_000);
+    expect(largestScale(9000, 980)).toBe(20_000);
   });
 });
 
