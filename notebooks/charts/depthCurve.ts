@@ -74,6 +74,8 @@ export function depthCurve(input: DepthCurveInput): Piece {
     top + 4,
     5,
   );
+  const axisName = 'depth at midspan, m';
+  const nameFrom = widthPx - textWidth(axisName, letters.drawing);
   const path = lineOf<{ depthM: number; cost: number }>(
     (point) => axis.x(point.depthM),
     (point) => money.x(point.cost),
@@ -129,10 +131,12 @@ export function depthCurve(input: DepthCurveInput): Piece {
       stroke: colours.ink,
       'stroke-width': pens.thin,
     }),
-    axis.ticks.map((tick) =>
-      label(axis.x(tick), bottom + 17, tick.toFixed(1), { anchor: 'middle', fill: colours.second }),
+    axis.ticks.map(
+      (tick) =>
+        (narrow || axis.x(tick) + 14 < nameFrom) &&
+        label(axis.x(tick), bottom + 17, tick.toFixed(1), { anchor: 'middle', fill: colours.second }),
     ),
-    label(widthPx, bottom + (narrow ? 31 : 17), 'depth at midspan, m', {
+    label(widthPx, bottom + (narrow ? 31 : 17), axisName, {
       anchor: 'end',
       fill: colours.second,
       halo: true,

@@ -61,7 +61,7 @@ export interface CrossingInput {
 function withChange(figure: string, change: string, spanM: number, frame: Frame, size: number): string {
   const room = spanM * frame.pxPerM;
   if (textWidth(figure + change, letters.table) + 6 < room) return figure + change;
-  return textWidth(figure, size) < room || room > 26 ? figure : '';
+  return textWidth(figure, size) + 3 < room || room > 26 ? figure : '';
 }
 
 /** Gradient of a straight road at its left end; over a crest those at both abutments with its radius. */

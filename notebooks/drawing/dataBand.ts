@@ -13,6 +13,7 @@ import { overOf } from './asked.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 
@@ -27,7 +28,8 @@ const nameRoom = 40;
  * of the ground, then tens; each is taken only where there is room for its figure.
  */
 function bandChainages(site: Site, option: AppraisedOption | null, frame: Frame): number[] {
-  const pitch = 33;
+  // Levels far below the datum are longer than those above it.
+  const pitch = Math.max(33, ...site.groundZ.map((z) => textWidth(level(z), letters.drawing) + 3));
   const ground = site.groundX.filter((x, index) => {
     const before = site.groundX[index - 1];
     const after = site.groundX[index + 1];

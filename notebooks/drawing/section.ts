@@ -172,7 +172,7 @@ export function section(input: SectionInput): Piece {
       scaleBar(scale, Math.max(8, place.x(-widthM / 2)), barY - 4, {
         heights: false,
         widthPx: Math.max(120, widthM * ppm),
-        rightPx: widthPx,
+        rightPx: width,
       }),
   ]);
 }

@@ -42,7 +42,7 @@ function layOut(input: StackInput): {
     axis: narrow
       ? linearAxis(values, 4, input.widthPx - 4)
       : // Right of the prices per m2, so that the line of the budget does not run through them.
-        linearAxis(values, bodyPx + costStart, input.widthPx - 8, 6),
+        linearAxis(values, bodyPx + costStart, input.widthPx - 8, 4),
     unit: moneyUnit(input.currency, largest),
   };
   return { shared, bodyPx, narrow };

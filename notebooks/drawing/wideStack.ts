@@ -135,7 +135,7 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
     const figure = length(span);
     const whole = figure + (changes[i] ?? '');
     if (textWidth(whole, letters.table) + 6 < span * frame.pxPerM) return whole;
-    return textWidth(figure, 11) < narrowest || span * frame.pxPerM > 26 ? figure : '';
+    return textWidth(figure, 11) + 3 < span * frame.pxPerM || span * frame.pxPerM > 26 ? figure : '';
   };
   const figureY = Math.max(deckY + 10, titleY + 24);
   const drawn = [

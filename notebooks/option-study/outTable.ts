@@ -63,7 +63,7 @@ export function outTable(options: readonly AppraisedOption[], currency: string):
                 'button',
                 {
                   type: 'button',
-                  class: 'action list',
+                  class: 'action',
                   'data-option': option.number,
                   'aria-label': `Draw option ${String(option.number)} as the reference`,
                 },
