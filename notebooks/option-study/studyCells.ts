@@ -115,11 +115,12 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
   graph.watch(byDepth, (state) => {
     if (state.state !== 'ready') return;
     whenIdle(() => {
-      const [now, views] = [graph.state(last), graph.state(options)];
-      const answer = now.state === 'ready' ? now.value : null;
-      if (answer === null || answer.asked !== answered || views.state !== 'ready') return;
-      const option = held(answer.asked, answer, views.value.reference);
-      if (option !== undefined) appraiseKept(answer.asked, option, kept);
+      const [answer, now, views] = [graph.state(last), graph.state(asked), graph.state(options)];
+      if (answer.state !== 'ready' || now.state !== 'ready' || views.state !== 'ready') return;
+      // While there is no answer yet the reference has just been worked out like this anyway.
+      if (answer.value?.asked !== now.value) return;
+      const option = held(now.value, answer.value, views.value.reference);
+      if (option !== undefined) appraiseKept(now.value, option, kept);
     });
   });
   const hold = graph.input<Hold | null>('hold', null);
