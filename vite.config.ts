@@ -30,7 +30,7 @@ const workedAnswers: Plugin = {
   name: 'worked-answers',
   apply: 'build',
   async generateBundle() {
-    const made = await runnerImport<typeof import('./notebooks/worked/workExamples.ts')>(
+    const made = await runnerImport<{ workExamples: () => { name: string; text: string }[] }>(
       resolve(root, 'notebooks/worked/workExamples.ts'),
       { configFile: false, root, logLevel: 'silent' },
     );
