@@ -3,13 +3,7 @@ export { notionalLanes, type NotionalLanes } from './notionalLanes.ts';
 export { serviceTraffic, type LongSpanLoad, type TrafficLoad } from './trafficLoad.ts';
 export { trafficOnDeck } from './trafficOnDeck.ts';
 export { trafficOnCrossLine, worstLaneShare } from './trafficOnCrossLine.ts';
-export {
-  aashtoFactors,
-  girderStiffnessM4,
-  outerCorrection,
-  type GirderDeck,
-  type GirderFactors,
-} from './aashtoFactors.ts';
+export { aashtoFactors, girderStiffnessM4, type GirderDeck, type GirderFactors } from './aashtoFactors.ts';
 export { leverRule } from './leverRule.ts';
 export { crossValue, type CrossLine } from './crossLine.ts';
 export { rigidCrossbeam, trafficOnGirder, type GirderOptions } from './trafficOnGirder.ts';

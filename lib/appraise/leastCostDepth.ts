@@ -16,6 +16,8 @@ const FIRST_LOOK = 0.4;
 const STRIDE = 1.22;
 /** Depths closer than this share of themselves cost so nearly the same that nothing is tried between them. */
 const FINE = 0.08;
+/** Depths read off the curve that are worked out before the shallowest known to do is taken. */
+const LOOKS = 3;
 /** Depths are drawn to 50 mm: 20 steps to the metre. */
 const STEPS = 20;
 
@@ -23,19 +25,18 @@ type Tried = readonly [on: number, trial: DepthTrial];
 
 const holds = ([, { utilisation }]: Tried): boolean => utilisation <= 1;
 
-/** Cost against the logarithm of depth through three trials. */
-function parabola(three: readonly [Tried, Tried, Tried]): { at: (on: number) => number; least: number } {
-  const [x0, x1, x2] = three.map(([on]) => Math.log(on)) as [number, number, number];
-  const [y0, y1, y2] = three.map(([, { cost }]) => cost) as [number, number, number];
+/** Cost at a depth between trials: a parabola against the logarithm of depth through the three about it, a line through two. */
+function costAt(rising: readonly Tried[], on: number): number {
+  const next = rising.findIndex(([tried]) => tried >= on);
+  if (rising[next]![0] === on) return rising[next]![1].cost;
+  const first = Math.max(0, Math.min(next - 1, rising.length - 3));
+  const three = rising.slice(first, first + 3);
+  const [x0 = 0, x1 = 0, x2] = three.map(([tried]) => Math.log(tried));
+  const [y0 = 0, y1 = 0, y2] = three.map(([, { cost }]) => cost);
+  const x = Math.log(on);
   const rise = (y1 - y0) / (x1 - x0);
-  const bend = ((y2 - y1) / (x2 - x1) - rise) / (x2 - x0);
-  const at = (on: number): number => {
-    const x = Math.log(on);
-    return y0 + (x - x0) * (rise + bend * (x - x1));
-  };
-  const vertex = (x0 + x1) / 2 - rise / (2 * bend);
-  const inside = bend > 0 && vertex > x0 && vertex < x2;
-  return { at, least: Math.min(y0, y1, y2, inside ? at(Math.exp(vertex)) : Infinity) };
+  const bend = x2 === undefined || y2 === undefined ? 0 : ((y2 - y1) / (x2 - x1) - rise) / (x2 - x0);
+  return y0 + (x - x0) * (rise + bend * (x - x1));
 }
 
 /**
@@ -102,21 +103,15 @@ export function* leastCostDepth(
   if (weaker && !holds(weaker) && best - weaker[0] > FINE * best)
     yield* visit(Math.round((best + weaker[0]) / 2));
 
-  const final = sorted().filter(holds);
-  const at = final.findIndex(([, { cost }]) => cost <= flat(final));
-  const inside = final[at]!;
-  const outside = final[at - 1];
-  if (!outside) return inside[0] / STEPS;
-  // Between a depth that is too dear and one that is not: the first on the grid where the curve is within the limit.
-  const beyond = final[at + 1];
-  const curve = beyond ? parabola([outside, inside, beyond]) : undefined;
-  const limit = Math.min(flat(final), (1 + FLAT) * (curve?.least ?? Infinity));
-  const line = (on: number): number =>
-    outside[1].cost + ((inside[1].cost - outside[1].cost) * (on - outside[0])) / (inside[0] - outside[0]);
-  let on = outside[0] + 1;
-  while (on < inside[0] && !((curve?.at ?? line)(on) <= limit)) on += 1;
-  // Plates and strands go in steps: what was read off the curve has to hold where it is worked out.
-  yield* visit(on);
-  const there = tried.get(on)!;
-  return (there.utilisation <= 1 && there.cost <= limit ? on : inside[0]) / STEPS;
+  // The first on the grid that is within the limit, or would be by the curve. Plates and strands go in steps, so what was
+  // read off the curve has to hold where it is worked out; if not, the curve is drawn anew.
+  for (let look = 1; ; look++) {
+    const final = sorted().filter(holds);
+    const grid = Array.from({ length: final.at(-1)![0] - final[0]![0] + 1 }, (_, i) => final[0]![0] + i);
+    const costs = grid.map((on) => costAt(final, on));
+    const limit = look > LOOKS ? flat(final) : (1 + FLAT) * Math.min(...costs);
+    const on = grid.find((step, i) => costs[i]! <= limit && (look <= LOOKS || tried.has(step)))!;
+    if (tried.has(on)) return on / STEPS;
+    yield* visit(on);
+  }
 }

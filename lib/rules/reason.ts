@@ -8,8 +8,8 @@ const placeholder = /\{(limit:)?([A-Za-z0-9]+)\}/g;
 /** Decimal places of a step: 0.01 -> 2. */
 const placesOf = (step: number): number => Math.max(0, Math.ceil(-Math.log10(step) - 1e-9));
 
-/** At most so many decimals, none of them a trailing zero. */
-const plain = (x: number, places: number): string => String(Number(x.toFixed(places)));
+/** At most so many decimals, none of them a trailing zero, with a true minus. */
+const plain = (x: number, places: number): string => String(Number(x.toFixed(places)) + 0).replace('-', '−');
 
 /**
  * A fact's value as it is printed, with its unit: '63 m', '1/26', '15 %', 'straight', 'not known'.

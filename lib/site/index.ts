@@ -6,5 +6,5 @@ export type { DepthAlong } from './depthAlong.ts';
 export { headroomSpare, type HeadroomSpare } from './headroomSpare.ts';
 export { profileFor, proposedProfile, type ProfileRefusal, type ProfileResult } from './profileFor.ts';
 export { survey } from './survey.ts';
-export { curveRow, roadCurves } from './roadCurves.ts';
-export { pieceAt, roadLevelAt } from './roadLevelAt.ts';
+export { roadCurves } from './roadCurves.ts';
+export { roadLevelAt } from './roadLevelAt.ts';

@@ -2,7 +2,7 @@ import type { Appraisal, AppraisedOption, Brief, Site, Spread, Study } from '../
 import { spanPaths, spansOf } from '../drawing/alongOption.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
-import { currencySign, fixed, listed, money2, moneyUnit, odds, spansText } from '../format.ts';
+import { fixed, listed, money2, moneyUnit, odds, spansText } from '../format.ts';
 import type { HtmlChild } from '../html.ts';
 import { workedFigure } from '../page/index.ts';
 
@@ -94,6 +94,3 @@ export function crossingWords(site: Site): HtmlChild {
     ' m.',
   ];
 }
-
-/** '€/m²' of the study's currency. */
-export const perM2Words = (currency: string): string => `${currencySign(currency)}/m²`;

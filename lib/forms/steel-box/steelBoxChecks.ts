@@ -2,7 +2,6 @@ import type { Check } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
 import { bearingPair } from './bearingsApart.ts';
 import { boxUse, noBoxUse } from './boxUse.ts';
-import { designReaction } from './boxSteel.ts';
 import { launchResistanceKN, shearReduction, webResistanceKN, webShearKN } from './sizePlates.ts';
 import type { SizedSteelBox } from './sizeSteelBox.ts';
 import { steelBoxData } from './steelBoxData.ts';
@@ -115,9 +114,4 @@ function room({ model }: SizedSteelBox): Check {
 
 function worstOf(checks: readonly Check[]): Check {
   return checks.reduce((worst, next) => (next.utilisation > worst.utilisation ? next : worst));
-}
-
-/** Design reactions of the supports, kN. */
-export function designReactions({ model, effects }: SizedSteelBox): number[] {
-  return model.supportsM.map((_, j) => designReaction(model, effects, j));
 }

@@ -11,15 +11,12 @@ import type { Use } from './spanUse.ts';
 
 /** Every limit state of the beams where it is used most, and of the slab on them. */
 export function precastChecks(model: PrecastModel, beams: SizedBeams): Check[] {
-  const { strands, shears, piers } = beams;
+  const { strands } = beams;
   const most = (pick: (use: (typeof strands)[number]['use']) => Use): Use =>
     strands.map(({ use }) => pick(use)).reduce((worst, next) => (next.use > worst.use ? next : worst));
   const row = (id: string, label: string, { demand, capacity }: Use, unit: string): Check =>
     check(id, label, demand, capacity, unit);
-  const greatest = (values: readonly number[]): number => Math.max(0, ...values);
-  const { haul, lifting, continuity } = pretensioned;
-  const piece = heaviestBeam(model);
-  const checks = [
+  return [
     row(
       'service-tension',
       'soffit in service, after losses',
@@ -50,38 +47,45 @@ export function precastChecks(model: PrecastModel, beams: SizedBeams): Check[] {
       most((use) => use.releaseBottom),
       'MPa',
     ),
-    check('web-struts', 'shear: struts in the web', greatest(shears.map((s) => s.crushing)), 1, '1'),
-    check('web-links', 'shear: links that fit in the web', greatest(shears.map((s) => s.crowding)), 1, '1'),
-    check('deflection', 'deflection under traffic', ...deflection(model), 'm'),
-    check(
-      'lifting',
-      'beam stable while it hangs',
-      lifting.leastSafety,
-      liftingSafety(model, piece.lengthM),
-      '1',
-    ),
-    check('hauled-length', 'length of a beam on the road', piece.lengthM, haul.lengthM, 'm'),
-    check('hauled-mass', 'mass of a beam on the road', piece.massT, haul.massT, 't'),
-    ...model.slab.checks,
+    ...beamChecks(model, beams, { piece: 'beam', pressed: 'beam ends pressed together at the piers' }),
   ];
-  if (piers.length > 0)
-    checks.push(
-      check(
-        'pier-bars',
-        'bars of the slab over the piers',
-        greatest(piers.map((p) => p.ratio)),
-        continuity.mostRatio,
-        '1',
-      ),
-      check(
-        'pier-compression',
-        'beam ends pressed together at the piers',
-        greatest(piers.map((p) => p.pressed)),
-        1,
-        '1',
-      ),
-    );
-  return checks;
+}
+
+/** What a beam is called that comes whole or in pieces, and what is pressed at the piers. */
+interface BeamWords {
+  readonly piece: string;
+  readonly pressed: string;
+}
+
+/** What beams in one piece and spliced ones have alike: webs, deflection, lifting, the road, the slab, the piers. */
+export function beamChecks(
+  model: PrecastModel,
+  { shears, piers }: Pick<SizedBeams, 'shears' | 'piers'>,
+  { piece, pressed }: BeamWords,
+): Check[] {
+  const greatest = (values: readonly number[]): number => Math.max(0, ...values);
+  const { haul, lifting, continuity } = pretensioned;
+  const { lengthM, massT } = heaviestBeam(model);
+  const safety = liftingSafety(model, lengthM);
+  const struts = greatest(shears.map(({ crushing }) => crushing));
+  const links = greatest(shears.map(({ crowding }) => crowding));
+  const bars = greatest(piers.map(({ ratio }) => ratio));
+  const ends = greatest(piers.map((pier) => pier.pressed));
+  return [
+    check('web-struts', 'shear: struts in the web', struts, 1, '1'),
+    check('web-links', 'shear: links that fit in the web', links, 1, '1'),
+    check('deflection', 'deflection under traffic', ...deflection(model), 'm'),
+    check('lifting', `${piece} stable while it hangs`, lifting.leastSafety, safety, '1'),
+    check('hauled-length', `length of a ${piece} on the road`, lengthM, haul.lengthM, 'm'),
+    check('hauled-mass', `mass of a ${piece} on the road`, massT, haul.massT, 't'),
+    ...model.slab.checks,
+    ...(piers.length > 0
+      ? [
+          check('pier-bars', 'bars of the slab over the piers', bars, continuity.mostRatio, '1'),
+          check('pier-compression', pressed, ends, 1, '1'),
+        ]
+      : []),
+  ];
 }
 
 /** The longest beam or piece: its length, m, and mass, t. */
@@ -92,7 +96,7 @@ export function heaviestBeam(model: PrecastModel): { readonly lengthM: number; r
 }
 
 /** Deflection of the longest span under all lanes shared by all beams, and what the standard allows, m. */
-export function deflection(model: PrecastModel): [demand: number, capacity: number] {
+function deflection(model: PrecastModel): [demand: number, capacity: number] {
   const { task, beam, layout, standard, standardId } = model;
   const spanM = Math.max(...task.spansM);
   const span = task.spansM.indexOf(spanM);

@@ -55,15 +55,22 @@ export function ownWeightShare(model: PrecastModel): number {
   return moments.simple / (moments.simple + moments.superimposed + moments.trafficMax);
 }
 
-/** Named figures of section, statics and strands, of one beam unless the name says otherwise. */
-export function precastFigures(
+/** Figures that beams in one piece and spliced ones have alike, of one beam unless the name says otherwise. */
+export function beamFigures(
   model: PrecastModel,
-  beams: SizedBeams,
+  { shears, piers }: Pick<SizedBeams, 'shears' | 'piers'>,
   lines: readonly MeasuredLine[],
 ): Record<string, number> {
   const { task, layout, shape, composite, slab } = model;
   const areaM2 = model.lengthM * task.deck.widthM;
-  const figures: Record<string, number> = {
+  const byPlace: [name: string, value: number][] = [
+    ...shears.map(({ mostKN }, span): [string, number] => [`span${span + 1}ShearDesignKN`, mostKN]),
+    ...piers.flatMap(({ hogDesignKNm, topBarsM2 }, i): [string, number][] => [
+      [`pier${i + 1}HogDesignKNm`, hogDesignKNm],
+      [`pier${i + 1}BarsM2`, topBarsM2],
+    ]),
+  ];
+  return {
     beamLines: layout.count,
     spacingM: layout.spacingM,
     overhangM: layout.overhangM,
@@ -80,9 +87,6 @@ export function precastFigures(
     curvatureFactor: model.curve,
     laneVehicles: model.traffic.vehicleFactor,
     trafficUniformKNm: model.traffic.udlKNm,
-    ...(model.torsion
-      ? { torqueArmM: model.torsion.armM, cellM2: model.torsion.cellM2, shearRatio: model.traffic.shearRatio }
-      : {}),
     ownKNm: model.ownKNm,
     wetKNm: model.wetKNm,
     superimposedKNm: model.superimposedKNm,
@@ -90,6 +94,22 @@ export function precastFigures(
     concreteM3M2: (quantityOf(lines, 'precast-concrete') + quantityOf(lines, 'deck-concrete')) / areaM2,
     strandKgM2: (quantityOf(lines, 'pretensioned-strand') + quantityOf(lines, 'prestress')) / areaM2,
     barsKgM2: quantityOf(lines, 'reinforcement') / areaM2,
+    ...Object.fromEntries(byPlace),
+  };
+}
+
+/** Named figures of section, statics and strands, of one beam unless the name says otherwise. */
+export function precastFigures(
+  model: PrecastModel,
+  beams: SizedBeams,
+  lines: readonly MeasuredLine[],
+): Record<string, number> {
+  const { task } = model;
+  const figures: Record<string, number> = {
+    ...beamFigures(model, beams, lines),
+    ...(model.torsion
+      ? { torqueArmM: model.torsion.armM, cellM2: model.torsion.cellM2, shearRatio: model.traffic.shearRatio }
+      : {}),
   };
   const moments = noMoments();
   task.spansM.forEach((_, span) => {
@@ -105,11 +125,6 @@ export function precastFigures(
     figures[`${name}SuperimposedKNm`] = moments.superimposed;
     figures[`${name}TrafficKNm`] = moments.trafficMax;
     figures[`${name}DesignKNm`] = moments.design;
-    figures[`${name}ShearDesignKN`] = beams.shears[span]!.mostKN;
-  });
-  beams.piers.forEach(({ hogDesignKNm, topBarsM2 }, i) => {
-    figures[`pier${i + 1}HogDesignKNm`] = hogDesignKNm;
-    figures[`pier${i + 1}BarsM2`] = topBarsM2;
   });
   return figures;
 }

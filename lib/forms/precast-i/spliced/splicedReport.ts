@@ -1,10 +1,8 @@
 import { uniform } from '../../../mechanics/index.ts';
 import type { MeasuredLine, Shape, SupportReaction } from '../../../model/index.ts';
-import { quantityOf } from '../../common/measured.ts';
-import { liftingSafety } from '../../common/precast/liftingStability.ts';
 import { structuralDepthM } from '../../common/precast/precastDrawing.ts';
 import { diaphragmM3 } from '../../common/precast/precastLines.ts';
-import { precastReactions } from '../../common/precast/precastReport.ts';
+import { beamFigures, precastReactions } from '../../common/precast/precastReport.ts';
 import { heightUnder } from '../../concrete-box/heightUnder.ts';
 import type { SizedSpliced } from './sizedSpliced.ts';
 import { pierSolidM3, spliceCount } from './splicedLines.ts';
@@ -52,32 +50,13 @@ export const tendonStages = 2;
 /** Named figures of one beam unless the name says otherwise. */
 export function splicedFigures(
   model: SplicedModel,
-  { sized, shears, piers }: SizedSpliced,
+  spliced: SizedSpliced,
   lines: readonly MeasuredLine[],
 ): Record<string, number> {
-  const { task, layout, shape, composite, slab, plan } = model;
-  const areaM2 = model.lengthM * task.deck.widthM;
-  const { tendons, straight } = sized;
-  const figures: Record<string, number> = {
-    beamLines: layout.count,
-    spacingM: layout.spacingM,
-    overhangM: layout.overhangM,
-    beamHeightM: shape.depthM,
-    beamAreaM2: shape.areaM2,
-    beamInertiaM4: shape.inertiaM4,
-    webM: shape.webM,
-    topFlangeWidthM: shape.topWidthM,
-    bottomFlangeWidthM: shape.bottomWidthM,
-    fillM: model.haunchM,
-    slabM: slab.midM,
-    compositeInertiaM4: composite.inertiaM4,
-    compositeCentroidM: composite.centroidM,
-    curvatureFactor: model.curve,
-    laneVehicles: model.traffic.vehicleFactor,
-    trafficUniformKNm: model.traffic.udlKNm,
-    ownKNm: model.ownKNm,
-    wetKNm: model.wetKNm,
-    superimposedKNm: model.superimposedKNm,
+  const { task, plan } = model;
+  const { tendons, straight } = spliced.sized;
+  return {
+    ...beamFigures(model, spliced, lines),
     splices: spliceCount(model),
     tendonStages,
     longestPieceM: plan.longestM,
@@ -90,19 +69,7 @@ export function splicedFigures(
     tendonInitialMPa: tendons.initialMPa,
     tendonLastingMPa: tendons.lastingMPa,
     towerHeightM: Math.max(...heightUnder(task).soffitM),
-    liftingSafety: liftingSafety(model, plan.longestM),
-    concreteM3M2: (quantityOf(lines, 'precast-concrete') + quantityOf(lines, 'deck-concrete')) / areaM2,
-    strandKgM2: (quantityOf(lines, 'pretensioned-strand') + quantityOf(lines, 'prestress')) / areaM2,
-    barsKgM2: quantityOf(lines, 'reinforcement') / areaM2,
   };
-  shears.forEach(({ mostKN }, span) => {
-    figures[`span${span + 1}ShearDesignKN`] = mostKN;
-  });
-  piers.forEach(({ hogDesignKNm, topBarsM2 }, i) => {
-    figures[`pier${i + 1}HogDesignKNm`] = hogDesignKNm;
-    figures[`pier${i + 1}BarsM2`] = topBarsM2;
-  });
-  return figures;
 }
 
 /** Splices and tendons in the elevation, faint. */
