@@ -13,7 +13,7 @@ describe('guide({spanM, widthM, lengthM, radiusM})', () => {
       const { forms } = guide({ spanM });
       expect([...forms.map((one) => one.form)].sort()).toEqual([...formIds].sort());
       const ranks = forms.map(({ status }) => rank[status]);
-      expect(ranks).toEqual([...ranks].sort());
+      expect(ranks).toEqual([...ranks].sort((a, b) => a - b));
       for (const one of forms) {
         expect(one.because.length, one.form).toBeGreaterThan(0);
         expect(one.sources.length, one.form).toBeGreaterThan(0);

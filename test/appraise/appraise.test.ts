@@ -39,7 +39,7 @@ describe('appraise', { timeout: 60_000 }, () => {
     expect(appraise(lowFerry())).toEqual(base);
     const study = lowFerry();
     const other = appraise({ ...study, books: { ...study.books, seed: 7 } });
-    const quantities = (a: Appraisal): unknown => a.options.map((o) => [o.number, o.quantities]).sort();
+    const quantities = (a: Appraisal): unknown => new Map(a.options.map((o) => [o.number, o.quantities]));
     expect(quantities(other)).toEqual(quantities(base));
     expect(cheapest(other, 'composite-i').cost.p50).not.toBe(cheapest(base, 'composite-i').cost.p50);
     expect(cheapest(other, 'composite-i').cost.p50 / cheapest(base, 'composite-i').cost.p50).toBeCloseTo(

@@ -24,7 +24,7 @@ describe('guide on the command line', () => {
       forms: Record<string, unknown>[];
     };
     const ranks = forms.map(({ status }) => ['in', 'possible', 'out'].indexOf(String(status)));
-    expect(ranks).toEqual([...ranks].sort());
+    expect(ranks).toEqual([...ranks].sort((a, b) => a - b));
     expect(ranks[0]).toBe(0);
     for (const { flip, ...form } of forms) {
       expect(Object.keys(form)).toEqual(['form', 'status', 'depthM', 'because', 'sources']);

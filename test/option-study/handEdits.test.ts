@@ -54,8 +54,8 @@ describe('withPier(study, option, index, chainageM)', () => {
     const answer = appraise(moved, kept);
     const mine = answer.options.find(({ number }) => number === option.number)!;
     expect(mine.supports[1]!.chainageM).toBe(start[1]! + 3);
-    expect(answer.options.map(({ number }) => number).sort()).toEqual(
-      first.options.map(({ number }) => number).sort(),
+    expect(answer.options.map(({ number }) => number).sort((a, b) => a - b)).toEqual(
+      first.options.map(({ number }) => number).sort((a, b) => a - b),
     );
     const back = appraise(released(moved, option.number), kept);
     expect(back.options.find(({ number }) => number === option.number)!.units).toEqual(option.units);

@@ -480,7 +480,7 @@ describe('states and failures', () => {
       },
       { policy: 'latest' },
     );
-    // eslint-disable-next-line @typescript-eslint/prefer-promise-reject-errors -- anything may be thrown
+    // oxlint-disable-next-line typescript/prefer-promise-reject-errors -- anything may be thrown
     const rejected = g.slow('rejected', {}, () => Promise.reject('a word'), { policy: 'progress' });
     await g.settled();
     expect(g.state(thrown)).toEqual({ state: 'failed', error: new Error('at once'), raisedBy: 'thrown' });

@@ -32,7 +32,7 @@ const jobs = {
   *refuse(what: 'error' | 'word' | 'function'): Steps<never> {
     yield { done: 0, of: 1, what };
     if (what === 'error') throw new Refusal('span: expected more than 0 m, received -3 m');
-    if (what === 'word') throw 'no'; // eslint-disable-line @typescript-eslint/only-throw-error -- anything may be thrown
+    if (what === 'word') throw 'no'; // oxlint-disable-line typescript/only-throw-error -- anything may be thrown
     throw Object.assign(new Error('has a function'), { remedy: () => 0 });
   },
   *uncloneable(what: string): Steps<() => number> {
