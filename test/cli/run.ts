@@ -1,4 +1,5 @@
 import { spawnSync } from 'node:child_process';
+import { readFileSync } from 'node:fs';
 
 /** What a command of the command line printed. */
 export interface Printed {
@@ -7,10 +8,16 @@ export interface Printed {
   readonly code: number | null;
 }
 
-/** Runs one of the commands of package.json as a user would. */
+const { scripts } = JSON.parse(readFileSync('package.json', 'utf8')) as { scripts: Record<string, string> };
+
+/** Runs one of the commands of package.json as a user would, in one process instead of the four of npm and tsx. */
 export function command(name: string, ...args: string[]): Printed {
-  const { stdout, stderr, status } = spawnSync('npm', ['run', '--silent', name, '--', ...args], {
-    encoding: 'utf8',
-  });
+  const [runner, file, ...rest] = scripts[name]!.split(' ');
+  if (runner !== 'tsx' || file === undefined) throw new Error(`${name} is not a command run by tsx`);
+  const { stdout, stderr, status } = spawnSync(
+    process.execPath,
+    ['--import', 'tsx', file, ...rest, ...args],
+    { encoding: 'utf8' },
+  );
   return { out: stdout, err: stderr, code: status };
 }
