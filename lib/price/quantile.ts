@@ -18,27 +18,34 @@ export function quantilesOf(values: Float64Array, ps: readonly number[]): number
   }
   // The largest value alone falls into one bin more.
   const perUnit = high > low ? BINS / (high - low) : 0;
-  const ends = new Uint32Array(BINS + 1);
+  const binOf = new Uint16Array(n);
+  const counts = new Uint32Array(BINS + 1);
   for (let k = 0; k < n; k++) {
     const bin = ((values[k]! - low) * perUnit) | 0;
-    ends[bin] = ends[bin]! + 1;
+    binOf[k] = bin;
+    counts[bin] = counts[bin]! + 1;
   }
-  for (let bin = 1; bin <= BINS; bin++) ends[bin] = ends[bin]! + ends[bin - 1]!;
 
-  const places = [...new Set(ps.flatMap((p) => [Math.floor(p * (n - 1)), Math.ceil(p * (n - 1))]))];
-  const binOf = (place: number): number => ends.findIndex((end) => place < end);
-  const bins = new Map<number, number[]>(places.map((place) => [binOf(place), []]));
-  const isAsked = new Uint8Array(BINS + 1);
-  for (const bin of bins.keys()) isAsked[bin] = 1;
-  for (let k = 0; k < n; k++) {
-    const bin = ((values[k]! - low) * perUnit) | 0;
-    if (isAsked[bin] === 1) bins.get(bin)!.push(values[k]!);
-  }
-  for (const inside of bins.values()) inside.sort((a, b) => a - b);
-
+  /** The bin a place in the order falls into, and how many values are in the bins before it. */
+  const binAt = (place: number): readonly [bin: number, before: number] => {
+    let before = 0;
+    let bin = 0;
+    while (before + counts[bin]! <= place) before += counts[bin++]!;
+    return [bin, before];
+  };
+  const inside = new Map<number, Float64Array>();
+  const sorted = (bin: number): Float64Array => {
+    let found = inside.get(bin);
+    if (found === undefined) {
+      found = new Float64Array(counts[bin]!);
+      for (let k = 0, next = 0; next < found.length; k++) if (binOf[k] === bin) found[next++] = values[k]!;
+      inside.set(bin, found.sort());
+    }
+    return found;
+  };
   const smallest = (place: number): number => {
-    const bin = binOf(place);
-    return bins.get(bin)![place - (bin > 0 ? ends[bin - 1]! : 0)]!;
+    const [bin, before] = binAt(place);
+    return sorted(bin)[place - before]!;
   };
   return ps.map((p) => {
     const at = p * (n - 1);
