@@ -57,9 +57,11 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
     };
     return {
       deckPerM(form, spanM, governingM) {
-        const [k, within] = between(SHARES, governingM > 0 ? spanM / governingM : 1);
-        return read(form, governingM, ({ perM }) => perM[k]! + within * (perM[k + 1]! - perM[k]!));
+        const governing = Math.max(governingM, spanM);
+        const [k, within] = between(SHARES, governing > 0 ? spanM / governing : 1);
+        return read(form, governing, ({ perM }) => perM[k]! + within * (perM[k + 1]! - perM[k]!));
       },
+      endWorksAs: (form, governingM) => read(form, governingM, (row) => row.endWorksAs),
       depthM: (form, governingM) => read(form, governingM, (row) => row.depthM),
       unitFixed: (form, governingM, pylons = 0) =>
         read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),

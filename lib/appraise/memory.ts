@@ -18,6 +18,8 @@ export interface TrialRow {
   readonly perM: readonly number[];
   /** Money that does not grow with the deck, by number of pylons. */
   readonly fixed: readonly number[];
+  /** How many times as long as itself the inner span is that an end span of the unit works like. */
+  readonly endWorksAs: number;
   /** What a support carries for each metre of the spans beside it, permanent and traffic together, kN/m. */
   readonly loadKNm: number;
 }

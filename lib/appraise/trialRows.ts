@@ -5,6 +5,7 @@ import { deckOnSupport } from '../substructure/index.ts';
 import { methodLines } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
 import type { Kept } from '../kept.ts';
+import { endSpanWork } from './endSpanWork.ts';
 import { openSpans } from './openSpans.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { TrialRow } from './memory.ts';
@@ -109,6 +110,14 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     };
   };
 
+  const { joined } = formModule(form);
+  const endWork = (permanentKNm: number, trafficKNm: number): number => {
+    if (hung || kind === 'simple-main' || joined === 'never') return 1;
+    // Surfacing, barriers and what else is laid on the deck come when it is whole.
+    const simpleKNm = joined === 'after-placing' ? Math.max(0, permanentKNm - site.deck.superimposedKNm) : 0;
+    return endSpanWork({ simpleKNm, continuousKNm: permanentKNm - simpleKNm, trafficKNm });
+  };
+
   const made = function* (index: number): Work<TrialRow> {
     const spanM = spansM[index]!;
     const range = depthRange(form, method, trialUnit(form, spanM, 1).spansM, site.deck);
@@ -132,7 +141,14 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     yield;
     const fixed = hung ? [whole.fixed, whole.fixed, sized(spanM, depthM, 2).fixed] : [whole.fixed];
     const { permanentKNm, trafficKNm } = deckOnSupport(whole.design);
-    return { depthM, mostDepthM: range[1], perM, fixed, loadKNm: permanentKNm + trafficKNm };
+    return {
+      depthM,
+      mostDepthM: range[1],
+      perM,
+      fixed,
+      endWorksAs: endWork(permanentKNm, trafficKNm),
+      loadKNm: permanentKNm + trafficKNm,
+    };
   };
 
   const key = (index: number): string => JSON.stringify([base, spansM[index], booksKey]);

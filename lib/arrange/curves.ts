@@ -31,11 +31,19 @@ export function unevenCost(
 /** Cost of one span by its length, money, at each whole metre, for one governing span. */
 export type SpanCosts = Float64Array;
 
-/** Cost of spans of one form read off the table once per governing span. */
+/** Inner span, as a multiple of an end span of a continuous unit, that this works like. */
+export const endWorksAs = (table: CostTable, form: FormId, governingM: number): number =>
+  table.endWorksAs?.(form, governingM) ?? 1;
+
+/**
+ * Cost of spans of one form read off the table once per governing span; of end spans where `worksAs` is what
+ * `endWorksAs` gives.
+ */
 export function spanCosts(
   table: CostTable,
   unit: Pick<Unit, 'form' | 'role'>,
   governingM: number,
+  worksAs = 1,
 ): SpanCosts {
   const { form } = unit;
   const last = Math.ceil(governingM) + 1;
@@ -45,7 +53,7 @@ export function spanCosts(
   let before = 0;
   let rateBefore = 0;
   for (let s = 1; s <= last; s = s === last ? last + 1 : Math.min(s + stride, last)) {
-    const rate = table.deckPerM(form, Math.min(s, governingM), governingM);
+    const rate = table.deckPerM(form, worksAs * Math.min(s, governingM), governingM);
     for (let t = before + 1; t <= s; t += 1) {
       const share = before === 0 ? 1 : (t - before) / (s - before);
       costs[t] =

@@ -1,6 +1,6 @@
 import type { Pattern } from '../model/index.ts';
 import type { Approach } from './approaches.ts';
-import { spanCostAt, spanCosts, type SpanCosts } from './curves.ts';
+import { endWorksAs, spanCostAt, spanCosts, type SpanCosts } from './curves.ts';
 import { SLACK } from './limits.ts';
 import type { MainSearch } from './mainSearch.ts';
 
@@ -34,7 +34,7 @@ function sidesBeyond(
   pylon: number,
   mainM: number,
   window: readonly [number, number],
-  row: SpanCosts,
+  row: MainRow,
   toLeft: boolean,
 ): Side[] {
   const { X } = search;
@@ -53,7 +53,7 @@ function sidesBeyond(
     const lists = approaches[end]!;
     if (lists.length === 0) continue;
     const pier = end > 0 && end < last ? search.half(end, span) : 0;
-    const own = spanCostAt(row, span) + search.half(pylon, span) + pier;
+    const own = spanCostAt(row.side, span) + search.half(pylon, span) + pier;
     for (const approach of lists) {
       const cost = own + approach.cost;
       const same = best.findIndex((side) => side.approach.spans === approach.spans);
@@ -69,7 +69,7 @@ interface Main {
   readonly a: number;
   readonly b: number;
   readonly mainM: number;
-  readonly row: SpanCosts;
+  readonly row: MainRow;
   /** Deck of the main span and fixed cost of the unit with one pylon and with two. */
   readonly onePylon: number;
   readonly twoPylons: number;
@@ -140,17 +140,26 @@ export function sidesOf(pattern: Pattern): Sides | null {
   return null;
 }
 
+/** Costs of the main span and of the spans beside it. */
+interface MainRow {
+  readonly inner: SpanCosts;
+  readonly side: SpanCosts;
+}
+
 /** Rows of span costs by whole metre of main span. */
-export type SpanRows = (mainM: number) => SpanCosts;
+export type SpanRows = (mainM: number) => MainRow;
 
 /** Reads the rows of one form off the table when they are first asked for. */
 export function spanRows({ table, request }: Pick<MainSearch, 'table' | 'request'>): SpanRows {
-  const rows = new Map<number, SpanCosts>();
+  const rows = new Map<number, MainRow>();
   return (mainM) => {
     const whole = Math.ceil(mainM - SLACK);
     let row = rows.get(whole);
     if (row === undefined) {
-      row = spanCosts(table, { form: request.form, role: 'main' }, whole);
+      const unit = { form: request.form, role: 'main' } as const;
+      const inner = spanCosts(table, unit, whole);
+      const worksAs = sidesOf(request.pattern)?.hung === true ? 1 : endWorksAs(table, request.form, whole);
+      row = { inner, side: worksAs === 1 ? inner : spanCosts(table, unit, whole, worksAs) };
       rows.set(whole, row);
     }
     return row;
@@ -183,7 +192,7 @@ export function pylonCost(
     const span = x[s + 1]! - x[s]!;
     if (s !== m && !(span >= window[0] * mainM - SLACK && span <= Math.min(window[1], 1) * mainM + SLACK))
       return null;
-    cost += spanCostAt(row, span);
+    cost += spanCostAt(s === m ? row.inner : row.side, span);
     if (at[s]! > 0) cost += half(at[s]!, span);
     if (at[s + 1]! < last) cost += half(at[s + 1]!, span);
   }
@@ -199,7 +208,7 @@ export function pylonLayouts(search: MainSearch, sides: Sides, rowOf: SpanRows):
       const mainM = X[b]! - X[a]!;
       if (!(mainM >= limits.minSpanM - SLACK && mainM <= limits.maxSpanM + SLACK)) continue;
       const row = rowOf(mainM);
-      const deck = spanCostAt(row, mainM);
+      const deck = spanCostAt(row.inner, mainM);
       const main = {
         a,
         b,

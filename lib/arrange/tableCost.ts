@@ -1,5 +1,5 @@
 import type { CostTable, FormId, Site, Unit } from '../model/index.ts';
-import { SOFT_ZONE_EXTRA, unevenCost } from './curves.ts';
+import { endWorksAs, SOFT_ZONE_EXTRA, unevenCost } from './curves.ts';
 import { SAME_M } from './frame.ts';
 
 /** A support between two spans, with the form that stands on it. */
@@ -43,7 +43,8 @@ export function governingSpan(unit: Unit): number {
 }
 
 /**
- * Cost of a row of units on the cost table, money: decks at the governing span of each unit, fixed costs, and every
+ * Cost of a row of units on the cost table, money: decks at the governing span of each unit, end spans of continuous
+ * ones as the longer inner spans that they work like, fixed costs, and every
  * intermediate support, dearer by `SOFT_ZONE_EXTRA` in a soft zone. Abutments are the same for every arrangement and
  * are left out. Uneven approach spans carry the preference of `unevenCost`. For ordering only.
  */
@@ -52,9 +53,14 @@ export function tableCost(units: readonly Unit[], site: Site, table: CostTable):
   for (const unit of units) {
     const governingM = governingSpan(unit);
     cost += table.unitFixed(unit.form, governingM, unit.pylons?.length ?? 0);
+    const endWork = endWorksAs(table, unit.form, governingM);
+    const hasEnds = unit.supportsM.length > 2 && unit.pylons === undefined;
     for (let i = 1; i < unit.supportsM.length; i += 1) {
       const span = unit.supportsM[i]! - unit.supportsM[i - 1]!;
-      cost += span * table.deckPerM(unit.form, span, governingM) + unevenCost(table, unit, span, governingM);
+      const works = hasEnds && (i === 1 || i === unit.supportsM.length - 1) ? endWork : 1;
+      cost +=
+        span * table.deckPerM(unit.form, works * span, governingM) +
+        unevenCost(table, unit, span, governingM);
     }
   }
   for (const { chainageM, form, leftM, rightM } of standings(units)) {

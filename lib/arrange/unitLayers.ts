@@ -34,7 +34,9 @@ export interface Layers {
   readonly task: UnitTask;
   readonly G: number;
   readonly K: number;
+  /** Of an inner span or of one alone, and of an end span. */
   readonly cost: SpanCosts;
+  readonly endCost: SpanCosts;
   readonly half: HalfCosts;
   readonly room: Room;
   /** A layout dearer than this need not be followed, and what the rest of it costs at least for each metre. */
@@ -45,7 +47,13 @@ export interface Layers {
 }
 
 /** Least that one more span costs for each metre of it: its deck and half the support it begins on. */
-export function leastPerM({ limits }: UnitTask, G: number, cost: SpanCosts, { A, B }: HalfCosts): number {
+export function leastPerM(
+  { limits }: UnitTask,
+  G: number,
+  cost: SpanCosts,
+  endCost: SpanCosts,
+  { A, B }: HalfCosts,
+): number {
   let a = Infinity;
   let b = Infinity;
   for (let i = 1; i < A.length - 1; i += 1) {
@@ -55,7 +63,10 @@ export function leastPerM({ limits }: UnitTask, G: number, cost: SpanCosts, { A,
   let least = Infinity;
   for (let s = Math.max(1, Math.floor(limits.minSpacingM)); s <= Math.ceil(G); s += 1) {
     // A span is straight between whole metres, so its cost for each metre is least at one of them.
-    least = Math.min(least, (cost[s]! + Math.min(0, a)) / s + Math.max(0, a) / (s + 1) + b);
+    least = Math.min(
+      least,
+      (Math.min(cost[s]!, endCost[s]!) + Math.min(0, a)) / s + Math.max(0, a) / (s + 1) + b,
+    );
   }
   return Math.max(0, least);
 }

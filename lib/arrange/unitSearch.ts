@@ -1,5 +1,5 @@
 import type { CostTable } from '../model/index.ts';
-import { halfCosts, spanCostAt, spanCosts } from './curves.ts';
+import { endWorksAs, halfCosts, spanCostAt, spanCosts } from './curves.ts';
 import { governingSpans, isFull, MORE_SPANS, mostSpans } from './governingSpans.ts';
 import { SLACK as sameShare } from './limits.ts';
 import { close, isTooDear, leastPerM, roomFor, type Layers } from './unitLayers.ts';
@@ -22,26 +22,28 @@ export type Visit = (
 
 /** Cost of the last span from z to the end, with the halves of the supports it carries. */
 function lastSpan(layers: Layers, z: number, end: number): number {
-  const { task, cost, half } = layers;
+  const { task, endCost, half } = layers;
   const s = task.X[end]! - task.X[z]!;
   return (
-    spanCostAt(cost, s) + half.A[z]! + half.B[z]! * s + (task.endIsPier ? half.A[end]! + half.B[end]! * s : 0)
+    spanCostAt(endCost, s) +
+    half.A[z]! +
+    half.B[z]! * s +
+    (task.endIsPier ? half.A[end]! + half.B[end]! * s : 0)
   );
 }
 
 /** Layouts of one and two spans; fills the costs of reaching each first pier. */
 function firstTwo(layers: Layers, F: Float64Array): void {
-  const { task, G, cost, half } = layers;
+  const { task, G, cost, endCost, half } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
   F.fill(Infinity);
   for (let x = 1; x < X.length && X[x]! <= G + SLACK; x += 1) {
     const s = X[x]!;
     if (s < limits.minSpacingM - SLACK) continue;
-    const deck = spanCostAt(cost, s);
     if (x >= firstEnd && x <= lastEnd && s >= limits.minSpanM - SLACK) {
-      close(layers, 1, x, deck + (task.endIsPier ? half.A[x]! + half.B[x]! * s : 0), 0, 0);
+      close(layers, 1, x, spanCostAt(cost, s) + (task.endIsPier ? half.A[x]! + half.B[x]! * s : 0), 0, 0);
     }
-    const reached = deck + half.A[x]! + half.B[x]! * s;
+    const reached = spanCostAt(endCost, s) + half.A[x]! + half.B[x]! * s;
     if (!isTooDear(layers, reached, s)) F[x] = reached;
   }
   if (layers.K < 2) return;
@@ -238,7 +240,10 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
   const worth = worthOf(ends === 1 ? (task.keep ?? Infinity) : Infinity);
   const cut = new Set<number>();
   for (const { G, K } of spreadFirst(governing)) {
-    const cost = spanCosts(table, { form: task.form, role: task.endIsPier ? 'approach' : 'main' }, G);
+    const unit = { form: task.form, role: task.endIsPier ? 'approach' : 'main' } as const;
+    const cost = spanCosts(table, unit, G);
+    const worksAs = endWorksAs(table, task.form, G);
+    const endCost = worksAs === 1 ? cost : spanCosts(table, unit, G, worksAs);
     const half = halfCosts(
       task.supports,
       Math.max(task.limits.minSpacingM, task.limits.interiorLeast * G),
@@ -246,8 +251,8 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
     );
     const fixed = table.unitFixed(task.form, G);
     const boundCost = worth.boundCost() - fixed;
-    const restPerM = boundCost < Infinity ? leastPerM(task, G, cost, half) : 0;
-    const layers: Layers = { task, G, K, cost, half, room, boundCost, restPerM, cut: false };
+    const restPerM = boundCost < Infinity ? leastPerM(task, G, cost, endCost, half) : 0;
+    const layers: Layers = { task, G, K, cost, endCost, half, room, boundCost, restPerM, cut: false };
     room.closed.fill(Infinity, 0, (K + 1) * ends);
     firstTwo(layers, F);
     for (let j = 2; j < K; j += 1) {

@@ -30,8 +30,13 @@ export interface DroppedCount {
 
 /** What the search knows of cost: made by `appraise` from the real stages, never by `arrange`. */
 export interface CostTable {
-  /** Deck cost, money per m of deck, of one span of this form when the governing span of its unit is `governingM`. */
+  /** Deck cost, money per m of deck, of one span of this form when the governing span of its unit is `governingM`; a longer one governs itself. */
   deckPerM(form: FormId, spanM: number, governingM: number): number;
+  /**
+   * How many times as long as itself the inner span is that an end span of a continuous unit of this form works like:
+   * `deckPerM` is asked for that length. 1 where absent.
+   */
+  endWorksAs?(form: FormId, governingM: number): number;
   /** Structural depth at midspan, m, for a governing span. */
   depthM(form: FormId, governingM: number): number;
   /** Fixed cost of a unit of this form (pylons, set-up of its method), money; `pylons` is 0 unless given. */

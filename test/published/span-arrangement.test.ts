@@ -148,12 +148,8 @@ describe('arrange on 500 crossings with lengths of built bridges', { timeout: 12
     }
   });
 
-  /**
-   * The aim is nine of ten; it is missed by one in a hundred (0.890). Most of what lies outside is three equal spans of 20
-   * to 40 m, whose ratio of 1 is over the 0.965 of those built: the cost table prices a span by its length and that of the
-   * longest, and does not know that an end span carries more than an inner one.
-   */
-  it('end over interior span lies between 5 and 95 % of those built in nearly nine of ten', () => {
+  /** What lies outside is mostly three equal spans of 20 to 40 m, whose ratio of 1 is over the 0.965 of those built. */
+  it('end over interior span lies between 5 and 95 % of those built in nine of ten', () => {
     const inside = found.filter(({ best }) => {
       const spans = spansOf(best);
       const row = rowFor(spans.length, Math.max(...spans));
@@ -161,7 +157,7 @@ describe('arrange on 500 crossings with lengths of built bridges', { timeout: 12
       return ratio >= row.p5 - 0.005 && ratio <= row.p95 + 0.005;
     });
     expect(none).toBeLessThan(COUNT / 10);
-    expect(inside.length / COUNT).toBeGreaterThanOrEqual(0.88);
+    expect(inside.length / COUNT).toBeGreaterThanOrEqual(0.9);
   });
 
   it('whatever would lift is tied down, and the tie is measured', () => {

@@ -13,6 +13,7 @@ export const adjacentBox: FormModule = {
   name: 'Adjacent box beams',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
+  joined: 'never',
   ignoresHeight: true,
   size: (task) => sizePrecast(boxBeams, task),
 };

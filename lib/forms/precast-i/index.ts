@@ -15,5 +15,6 @@ export const precastI: FormModule = {
   name: 'Precast I-beams',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
+  joined: 'after-placing',
   size: (task) => (mustBeSpliced(task) ? sizeSpliced(task) : sizePrecast(iBeams, task)),
 };

@@ -13,6 +13,7 @@ export const precastTrough: FormModule = {
   name: 'Precast troughs',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
+  joined: 'after-placing',
   ignoresHeight: true,
   size: (task) => sizePrecast(troughs, task),
 };
