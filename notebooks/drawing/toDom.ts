@@ -43,6 +43,16 @@ export const toDom = (piece: Piece, document: Document): Element => build(piece,
 const signOf = (child: Piece | string): string =>
   typeof child === 'string' ? '' : `${child.tag} ${child.attrs['data-key'] ?? child.attrs['class'] ?? ''}`;
 
+const isText = (child: Piece | string): child is string => typeof child === 'string';
+
+/** Whether two children have the same sign; quicker than writing both down. */
+function haveOneSign(a: Piece | string, b: Piece | string): boolean {
+  if (a === b) return true;
+  if (isText(a) || isText(b)) return isText(a) && isText(b);
+  const key = (piece: Piece): string | undefined => piece.attrs['data-key'] ?? piece.attrs['class'];
+  return a.tag === b.tag && key(a) === key(b);
+}
+
 /** For each child of the next drawing the index of the one it takes over, or -1. */
 function pairs(before: Piece['children'], next: Piece['children']): number[] {
   const free = new Map<string, number[]>();
@@ -55,24 +65,40 @@ function pairs(before: Piece['children'], next: Piece['children']): number[] {
   return next.map((child) => free.get(signOf(child))?.shift() ?? -1);
 }
 
-function patch(element: Element, { piece: before, nodes, own }: Made, next: Piece): void {
-  if (before === next) return;
-  for (const name of Object.keys(before.attrs)) {
+function patchAttributes(element: Element, own: string | null, before: Piece, next: Piece): void {
+  for (const name in before.attrs) {
     if (!(name in next.attrs)) element.removeAttribute(name);
   }
-  for (const [name, value] of Object.entries(next.attrs)) {
+  for (const name in next.attrs) {
+    const value = next.attrs[name]!;
     if (before.attrs[name] !== value) element.setAttribute(name, valueIn(own, name, value));
   }
+}
+
+/** The node of a child, made to show the next one. */
+function patchNode(node: ChildNode, before: Piece | string, next: Piece | string): ChildNode {
+  if (typeof next === 'string') {
+    if (before !== next) (node as Text).data = next;
+  } else patch(node as Element, made.get(node as Element)!, next);
+  return node;
+}
+
+function patch(element: Element, { piece: before, nodes, own }: Made, next: Piece): void {
+  if (before === next) return;
+  patchAttributes(element, own, before, next);
+  const [olds, news] = [before.children, next.children];
+  // Most often nothing has come or gone.
+  if (olds.length === news.length && olds.every((child, i) => haveOneSign(child, news[i]!))) {
+    news.forEach((child, i) => patchNode(nodes[i]!, olds[i]!, child));
+    made.set(element, { piece: next, nodes, own });
+    return;
+  }
   const { ownerDocument } = element;
-  const taken = pairs(before.children, next.children);
-  const fresh = next.children.map((child, i): ChildNode => {
+  const taken = pairs(olds, news);
+  const fresh = news.map((child, i): ChildNode => {
     const from = taken[i]!;
     const node = nodes[from];
-    if (node === undefined) return nodeFor(child, ownerDocument, own);
-    if (typeof child === 'string') {
-      if (before.children[from] !== child) (node as Text).data = child;
-    } else patch(node as Element, made.get(node as Element)!, child);
-    return node;
+    return node === undefined ? nodeFor(child, ownerDocument, own) : patchNode(node, olds[from]!, child);
   });
   const stays = new Set(fresh);
   for (const node of nodes) if (!stays.has(node)) node.remove();

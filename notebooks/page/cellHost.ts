@@ -81,6 +81,9 @@ const clock = (date: Date): string =>
     .map((part) => String(part).padStart(2, '0'))
     .join(':');
 
+/** A drawing that stands in a body for itself, not one in a table or a field. */
+const ownDrawing = ':scope > svg.drawing, :scope > * > svg.drawing';
+
 /** How far outside the screen a cell still counts as on it. */
 const NEAR = '25%';
 
@@ -169,6 +172,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       const whole = drawPart(body, spec.body, values, room);
       const noted = notes === null || drawPart(notes, spec.notes, values, room);
       isOwed = !whole || !noted;
+      element.classList.toggle('drawn', body.querySelector(ownDrawing) !== null);
       bodyError = undefined;
     } catch (error) {
       // A drawing that cannot be made is a failure of this cell like any other; the last one stays.

@@ -90,17 +90,22 @@ export function figureInput(spec: FigureSpec): FigureInput {
     write();
   };
 
+  /** Marks the figure, and the entry of a list that it belongs to. */
+  const inHand = (is: boolean): void => {
+    element.classList.toggle('grasped', is);
+    element.closest('.point, .strip')?.classList.toggle('in-hand', is);
+  };
   const showScale = (stepNow: number): void => {
     if (shown === 'unknown') return;
     const start = before === 'unknown' ? shown : before;
     const marks = spec.marks?.() ?? [];
     const piece = figureScale({ before: start, now: shown, step: stepNow, rules: spec, marks });
     below.replaceChildren(toDom(piece, field.ownerDocument));
-    element.classList.add('grasped');
+    inHand(true);
   };
   const hideScale = (): void => {
     below.replaceChildren();
-    element.classList.remove('grasped');
+    inHand(false);
     if (unknown !== undefined && shown !== 'unknown' && hasFocus()) offerUnknown();
   };
   const offerUnknown = (): void => {

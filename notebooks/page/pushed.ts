@@ -6,6 +6,7 @@ import { h, type HtmlChild } from '../html.ts';
  */
 export const pushed = (label: string, ...children: HtmlChild[]): HTMLElement => {
   const part = h('div', { class: 'pushed', tabindex: 0, role: 'region', 'aria-label': label }, children);
+  part.classList.toggle('with-bar', part.firstElementChild?.classList.contains('ranking') === true);
   part.addEventListener('scroll', () => (part.dataset['left'] = String(part.scrollLeft)), { passive: true });
   return part;
 };

@@ -20,6 +20,10 @@ export interface RefusalSlot {
 /** The place below a field's line where a refusal is said; it takes no room while there is none. */
 export function refusalSlot(id: string): RefusalSlot {
   const element = h('span', { class: 'refusal', id, role: 'status' });
+  const tell = (): void => {
+    const told = element.closest('.told');
+    if (told !== null) speaks(told);
+  };
   return {
     element,
     say(words, ways) {
@@ -27,11 +31,21 @@ export function refusalSlot(id: string): RefusalSlot {
         h('span', { class: 'why' }, words),
         ...(ways.length === 0 ? [] : [h('span', { class: 'ways' }, waysOn(ways))]),
       );
+      tell();
     },
     clear() {
       element.replaceChildren();
+      tell();
     },
   };
+}
+
+/** Marks a place below a row of fields, and that row, where one of its fields is refused. */
+export function speaks(told: Element): void {
+  told.classList.toggle('speaks', told.querySelector('.refusal:not(:empty)') !== null);
+  const row = told.closest('.told-row');
+  const isTold = row?.querySelector('.speaks') != null;
+  row?.previousElementSibling?.classList.toggle('told-of', isTold);
 }
 
 /** Tells those who do not see it whether a field is refused, and by what words. */

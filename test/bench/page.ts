@@ -45,18 +45,20 @@ function watchPage(): void {
   let lastDrawn = 0;
   let longest = 0;
   let isDragging = false;
+  /** A drawing is changed in place: new nodes, moved marks and other words all count. */
+  const whatever = { childList: true, subtree: true, attributes: true, characterData: true };
   const watched: Watch = {
     get first() {
       return first;
     },
     start(station) {
-      const cell = document.getElementById(station)!;
+      const shown = document.getElementById(station)!.querySelector('.body')!;
       updates = longest = 0;
       isDragging = true;
       began = performance.now();
       let before = began;
       let isNew = false;
-      new MutationObserver(() => (isNew = true)).observe(cell, { childList: true, subtree: true });
+      new MutationObserver(() => (isNew = true)).observe(shown, whatever);
       const frame = (now: number): void => {
         if (!isDragging) return;
         longest = Math.max(longest, now - before);
@@ -74,7 +76,7 @@ function watchPage(): void {
       const drawing = new MutationObserver(() => {
         requestAnimationFrame(() => (lastDrawn = performance.now()));
       });
-      for (const body of bodies) drawing.observe(body, { childList: true, subtree: true });
+      for (const body of bodies) drawing.observe(body, whatever);
     },
     async result() {
       while (performance.now() - lastDrawn < 1500) await new Promise((resolve) => setTimeout(resolve, 50));
