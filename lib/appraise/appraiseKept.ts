@@ -43,7 +43,8 @@ export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory
   if (units === null) return { option: null, faults: [BEYOND_ABUTMENT] };
   const depthsM = depthsOf(units, before, own?.depthM ?? null);
   const depthM = depthsM[units.indexOf(mainUnit(units))]!;
-  const option: Option = { number, form, method, units, depthM, origin: 'kept' };
+  const variant = own?.variant ?? before.variant ?? {};
+  const option: Option = { number, form, method, units, depthM, variant, origin: 'kept' };
   const onDraws = drawn(bench, [...new Set(units.map((unit) => unit.form))]);
   const faults = faultsOf(units, requestFor(option, site, patternOf(form, units)), site);
   try {

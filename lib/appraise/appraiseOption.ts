@@ -11,7 +11,8 @@ import { requestFor } from './requestFor.ts';
 import { riversCrossed } from './riversCrossed.ts';
 import { hundredMm } from './hundredMm.ts';
 import type { Work } from './work.ts';
-import { mainUnit, spareOf, workOption, workOptionAt, type Worked } from './workOption.ts';
+import { workOption } from './cheapestOption.ts';
+import { mainUnit, spareOf, workOptionAt, type Worked } from './workOption.ts';
 import type { Workbench } from './workbench.ts';
 
 /** An option worked out, priced and ruled on, with its cost in every draw. */

@@ -15,10 +15,10 @@ const STEPS = 20;
  * they show what depth does to the cost of the whole crossing. Never fewer than the option itself.
  */
 export function depthTrials(study: Study, worked: AppraisedOption): readonly Option[] {
-  const { number, form, method, units, designs } = worked;
+  const { number, form, method, units, designs, variant = {} } = worked;
   const main = mainUnit(units);
   const ownM = designs[units.indexOf(main)]!.task.depthM;
-  const [least, most] = depthRange(form, method, spansOf(main), survey(study.brief).deck);
+  const [least, most] = depthRange(form, method, spansOf(main), survey(study.brief).deck, variant);
   const depths = new Set([ownM]);
   for (let k = -EACH_SIDE; k <= EACH_SIDE; k++) {
     const depthM = Math.round(ownM * STRIDE ** k * STEPS) / STEPS;
@@ -27,5 +27,5 @@ export function depthTrials(study: Study, worked: AppraisedOption): readonly Opt
   }
   return [...depths]
     .sort((a, b) => a - b)
-    .map((depthM) => ({ number, form, method, units, depthM, origin: 'kept' }));
+    .map((depthM) => ({ number, form, method, units, depthM, variant, origin: 'kept' }));
 }

@@ -33,10 +33,13 @@ function unsizeable({ form, supportsM, pylons = [] }: Unit): string | null {
 /** Units of an option kept by hand on the crossing as it is now, or why it cannot be worked out at all. */
 export function keptUnits(
   site: Site,
-  { units }: Pick<KeptOption, 'units'>,
+  { form, units, variant = {} }: Pick<KeptOption, 'form' | 'units' | 'variant'>,
 ): { readonly units: readonly Unit[] } | { readonly because: readonly string[] } {
   const placed = between(site, units);
   if (placed === null) return { because: [BEYOND_ABUTMENT] };
   const because = placed.map(unsizeable).filter((fault) => fault !== null);
+  const made = formModule(form);
+  if (Object.keys(variant).length > 0 && !made.variants)
+    because.push(`${made.name}: made in one way only, no haunch or substringers expected`);
   return because.length > 0 ? { because } : { units: placed };
 }

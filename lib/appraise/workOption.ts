@@ -1,5 +1,14 @@
 import { formModule } from '../forms/index.ts';
-import type { Design, Option, RoadProfile, Site, Unit, UnitTask, WorkedOption } from '../model/index.ts';
+import type {
+  Design,
+  Option,
+  RoadProfile,
+  Site,
+  Unit,
+  UnitTask,
+  Variant,
+  WorkedOption,
+} from '../model/index.ts';
 import { planProgramme } from '../programme/index.ts';
 import {
   constructionDepth,
@@ -11,11 +20,9 @@ import {
 } from '../site/index.ts';
 import { expectedLines, placeText, standOneSupport, standSupports } from '../substructure/index.ts';
 import { measure } from '../takeoff/index.ts';
-import { depthRange } from './depthRange.ts';
 import { remembered } from '../kept.ts';
-import { leastCostDepth } from './leastCostDepth.ts';
+import type { DepthTrial } from './leastCostDepth.ts';
 import type { AtDepth } from './memory.ts';
-import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
 
 /** Spans of a unit, m. */
@@ -58,8 +65,23 @@ function profileOrNearest(site: Site, depth: DepthAlong | number): RoadProfile {
   return again.profile;
 }
 
+/** Depths are drawn to 50 mm: 20 steps to the metre. */
+const STEPS = 20;
 /** Heights under the deck, m, are told apart to this: a unit is not sized anew for a centimetre of ground. */
 const CLEAR_CLASS_M = 0.25;
+
+/** What a variant asks of the task of a unit at a depth, m. */
+function madeAs(
+  { haunchRatio, substringers }: Variant = {},
+  depthM: number,
+): Pick<UnitTask, 'haunch' | 'substringers'> {
+  return {
+    ...(haunchRatio === undefined
+      ? {}
+      : { haunch: { pierDepthM: Math.round(haunchRatio * depthM * STEPS) / STEPS, law: 'parabolic' } }),
+    ...(substringers ? { substringers } : {}),
+  };
+}
 
 function taskOf(
   bench: Workbench,
@@ -80,6 +102,7 @@ function taskOf(
     standard: site.standard,
     planRadiusM: site.planRadiusM ?? Infinity,
     depthM,
+    ...(unit.role === 'main' ? madeAs(option.variant, depthM) : {}),
     ...(unit.pylons ? { pylons: unit.pylons } : {}),
     ...(module.ignoresHeight
       ? {}
@@ -123,8 +146,8 @@ function workAt(bench: Workbench, option: Option, depthsM: readonly number[]): A
   return { designs, profile, supports, lines, months: programme.months };
 }
 
-const keyOf = ({ form, method, units }: Option, depthsM: readonly number[]): string =>
-  JSON.stringify([form, method, units, depthsM]);
+const keyOf = ({ form, method, units, variant = {} }: Option, depthsM: readonly number[]): string =>
+  JSON.stringify([form, method, units, depthsM, variant]);
 
 /** The same, from memory where it has been worked out before. */
 function atDepths(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
@@ -133,59 +156,28 @@ function atDepths(bench: Workbench, option: Option, depthsM: readonly number[]):
   return remembered(bench.keptHere.atDepth, key, () => workAt(bench, option, depthsM));
 }
 
-/** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
-const OVER_DECK_ALONE = 1.15;
-
-/**
- * Depths worth trying, m: from the least of the published band to somewhat over that of least deck cost. Clearance, road
- * and supports only ever ask for less depth than the deck alone.
- */
-function depthsToTry(bench: Workbench, option: Option, main: Unit): readonly [least: number, most: number] {
-  const spans = spansOf(main);
-  const [least, most] = depthRange(main.form, option.method, spans, bench.site.deck);
-  const deckAlone = bench.tables.tableFor(option).depthM(main.form, Math.max(...spans));
-  return [least, Math.max(least, Math.min(most, OVER_DECK_ALONE * deckAlone))];
-}
-
 /** Depths of all units, m, when the main unit has the one given: approaches have theirs of least deck cost. */
-function depthsOf(bench: Workbench, option: Option, depthM: number): number[] {
+export function depthsOf(bench: Workbench, option: Option, depthM: number): number[] {
   const table = bench.tables.tableFor(option);
   return option.units.map((unit) =>
-    unit.role === 'main' ? depthM : Math.round(table.depthM(unit.form, Math.max(...spansOf(unit))) * 20) / 20,
+    unit.role === 'main'
+      ? depthM
+      : Math.round(table.depthM(unit.form, Math.max(...spansOf(unit))) * STEPS) / STEPS,
   );
 }
 
-/** Depth of the main unit, m: the shallowest within 1 % of the least cost of the whole crossing at mean rates. */
-function* bestDepth(bench: Workbench, option: Option, main: Unit): Work<number> {
+/** What an option made one way comes to at one depth of its main unit, m. */
+export function trialAt(bench: Workbench, option: Option, depthM: number): DepthTrial {
   const { site, costOf } = bench;
-  return yield* leastCostDepth(
-    depthsToTry(bench, option, main),
-    (trial) => {
-      const { designs, profile, supports, lines } = atDepths(bench, option, depthsOf(bench, option, trial));
-      const foundations = supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
-      const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
-      const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
-      return {
-        cost: costOf(lines) + costOf(foundations),
-        // A depth that fouls a clearance fits no better than one that is too weak.
-        utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation,
-      };
-    },
-    bench.tables.tableFor(option).depthM(main.form, Math.max(...spansOf(main))),
-  );
-}
-
-/**
- * Works out one option: designs of its units, road profile, supports, take-off and programme. A depth that the option
- * leaves open is the shallowest within 1 % of the least cost of the whole crossing inside the published band. Pauses
- * after each depth tried.
- *
- * @throws RangeError where a form cannot be sized for what it is asked
- */
-export function* workOption(bench: Workbench, option: Option): Work<Worked> {
-  const main = mainUnit(option.units);
-  const depthM = option.depthM ?? (yield* bestDepth(bench, option, main));
-  return workOptionAt(bench, option, depthsOf(bench, option, depthM));
+  const { designs, profile, supports, lines } = atDepths(bench, option, depthsOf(bench, option, depthM));
+  const foundations = supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
+  const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
+  const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
+  return {
+    cost: costOf(lines) + costOf(foundations),
+    // A depth that fouls a clearance fits no better than one that is too weak.
+    utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation,
+  };
 }
 
 /** A worked option and the text of what it was worked out from on its site. */
@@ -196,11 +188,11 @@ export interface Worked {
 
 /** One option at depths that are given for each of its units, m; see `workOption`. */
 export function workOptionAt(bench: Workbench, option: Option, depthsM: readonly number[]): Worked {
-  const { number, form, method, units } = option;
+  const { number, form, method, units, variant = {} } = option;
   const found = atDepths(bench, option, depthsM);
   const { depthM } = found.designs[units.indexOf(mainUnit(units))]!;
   return {
-    option: { number, form, family: formModule(form).family, method, units, depthM, ...found },
+    option: { number, form, family: formModule(form).family, method, units, depthM, variant, ...found },
     key: keyOf(option, depthsM),
   };
 }

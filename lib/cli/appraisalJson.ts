@@ -12,6 +12,7 @@ function optionJson(option: AppraisedOption): object {
     spans: option.units.flatMap(spansOf),
     supports: option.supports.map(({ chainageM, kind, heightM }) => ({ chainageM, kind, heightM })),
     depthM: option.depthM,
+    variant: option.variant,
     status: option.status,
     rulings: option.rulings,
     headroomSpareM: option.headroom?.spareM,

@@ -1,5 +1,6 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { depthWindow } from '../rules/figures.ts';
+import { variantFigures } from './variantFigures.ts';
 
 const kept = (at: At): number => at.study.options.kept.findIndex(({ number }) => number === at.option.number);
 const role = (at: At): 'main' | 'approach' => at.option.units[at.index('unit')]!.role;
@@ -42,6 +43,7 @@ const figureWords = (id: string): string =>
 
 /** What a unit is sized for, and what every form reports of it. What only one form reports stands beside that form. */
 export const designFigures: readonly Descriptor[] = [
+  ...variantFigures,
   described({
     path: unit('task/spansM/:i'),
     label: (at) => `span ${at.index('i') + 1}${name(at)}`,
@@ -113,7 +115,7 @@ export const designFigures: readonly Descriptor[] = [
         : 'read off the cost table at the longest span, to 50 mm',
     inputs: (at) => {
       const { task } = at.design;
-      const { paths, by } = depthWindow(task.form, task.method, task.spansM.length);
+      const { paths, by } = depthWindow(task, task.haunch !== undefined);
       return { band: paths, of: by === 'span' ? spans(at) : ['site/deck/widthM'] };
     },
   }),

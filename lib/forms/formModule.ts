@@ -1,4 +1,13 @@
-import type { Design, Family, FormId, MethodId, Pattern, UnitTask } from '../model/index.ts';
+import type {
+  DeckSpec,
+  Design,
+  Family,
+  FormId,
+  MethodId,
+  Pattern,
+  UnitTask,
+  Variant,
+} from '../model/index.ts';
 
 export type { Pattern } from '../model/index.ts';
 
@@ -19,6 +28,11 @@ export interface FormModule {
   readonly joined?: 'after-placing' | 'never';
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
   readonly ignoresHeight?: true;
+  /**
+   * Other ways of making a unit than the plain one that are worth pricing for its spans (m), deck and method; absent where
+   * the form leaves no choice.
+   */
+  variants?(spansM: readonly number[], deck: DeckSpec, method: MethodId): readonly Variant[];
   /**
    * Sizes one unit. Always returns a design; where a limit cannot be met within practical plates, strands or bars the
    * offending check has a utilisation above 1 and a warning says so (the option-stage rule then puts the option out).

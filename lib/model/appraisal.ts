@@ -1,5 +1,5 @@
 import type { BillPart, Family, FormId, MethodId } from './ids.ts';
-import type { Design, DepthPair, MeasuredLine, Quantities } from './design.ts';
+import type { Design, DepthPair, MeasuredLine, Quantities, Variant } from './design.ts';
 import type { Dropped, Ruling } from './ruling.ts';
 import type { RoadProfile, Site } from './site.ts';
 import type { RegisterEntry, Unit } from './study.ts';
@@ -130,6 +130,8 @@ export interface WorkedOption {
   /** One design per unit, in order. */
   readonly designs: readonly Design[];
   readonly depthM: DepthPair;
+  /** How its main unit is made; absent on options made before there was a choice. */
+  readonly variant?: Variant;
   readonly profile: RoadProfile;
   readonly supports: readonly Support[];
   /** All measured lines except the foundations that depend on the ground class. */

@@ -1,4 +1,5 @@
 import type { FormId, MethodId } from './ids.ts';
+import type { Variant } from './design.ts';
 import type { Unit } from './study.ts';
 
 /** An option: form, arrangement, depth and method of construction. */
@@ -9,6 +10,8 @@ export interface Option {
   readonly units: readonly Unit[];
   /** Structural depth at midspan of the main unit, m; null until it has been found. */
   readonly depthM: number | null;
+  /** How the main unit is made; absent until the cheapest way has been found. */
+  readonly variant?: Variant;
   readonly origin: 'proposed' | 'kept';
 }
 

@@ -1,3 +1,4 @@
+import type { Variant } from './design.ts';
 import type { FormId, GroundClassId, MethodId, StandardId } from './ids.ts';
 
 /**
@@ -250,6 +251,8 @@ export interface KeptOption {
   readonly units: readonly Unit[];
   /** Structural depth at midspan of the main unit, m; null = least crossing cost. */
   readonly depthM: number | null;
+  /** How its main unit is made; absent = least crossing cost. */
+  readonly variant?: Variant;
   /** Supports that hold their place while others are moved: 0-based along the crossing, abutments counted. */
   readonly locked?: readonly number[];
 }

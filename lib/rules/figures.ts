@@ -5,6 +5,7 @@ import {
   depthBand,
   endRatioWindow,
   floorBand,
+  haunchedDepthBands,
   midspanDepthBand,
   spanWindow,
   type Interval,
@@ -77,6 +78,16 @@ export const windowFigures: readonly Descriptor[] = [
     'depth',
     (at) => midspanDepthBand(form(at)) ?? any,
   ),
+  ...(['midspan', 'pier'] as const).flatMap((place) =>
+    window(
+      `haunched/${place}`,
+      `${place} depth of haunched units over span`,
+      '',
+      'band that published guidance favours',
+      'depth',
+      (at) => haunchedDepthBands(form(at))?.[place] ?? any,
+    ),
+  ),
   ...window(
     'floor',
     'floor depth over deck width',
@@ -89,13 +100,17 @@ export const windowFigures: readonly Descriptor[] = [
 
 /** Paths of the published band behind the depth of a unit, and what it is measured by. */
 export function depthWindow(
-  of: FormId,
-  method: MethodId,
-  spans: number,
+  { form: of, method, spansM }: { form: FormId; method: MethodId; spansM: readonly number[] },
+  isHaunched: boolean,
 ): { readonly paths: readonly string[]; readonly by: 'span' | 'deck width' } {
   const ends = ['least', 'most'] as const;
   if (floorBand(of)) return { paths: ends.map((end) => `windows/${of}/floor/${end}`), by: 'deck width' };
+  if (isHaunched && haunchedDepthBands(of)) {
+    const places = ['midspan', 'pier'] as const;
+    const paths = places.flatMap((place) => ends.map((end) => `windows/${of}/haunched/${place}/${end}`));
+    return { paths, by: 'span' };
+  }
   if (midspanDepthBand(of)) return { paths: ends.map((end) => `windows/${of}/midspan/${end}`), by: 'span' };
-  const continuity = spans > 1 ? 'continuous' : 'simple';
+  const continuity = spansM.length > 1 ? 'continuous' : 'simple';
   return { paths: ends.map((end) => `windows/${of}/depth/${continuity}/${method}/${end}`), by: 'span' };
 }

@@ -10,6 +10,7 @@ export {
   depthMeasure,
   endRatioWindow,
   floorBand,
+  haunchedDepthBands,
   leastHeadroomSpareM,
   midspanDepthBand,
   sideRatioWindow,

@@ -120,7 +120,7 @@ export function depthMeasure(form: FormId): DepthMeasure {
 
 /**
  * Published band of `depthMeasure` over span, [least, most], of a form. For forms of varying depth it is the depth at
- * the support, and `midspanDepthBand` gives the other.
+ * the support, and `midspanDepthBand` gives the other; a form that may have either is taken at constant depth.
  *
  * @param method some methods need more depth (launching)
  */
@@ -130,7 +130,7 @@ export function depthBand(
   method: MethodId = 'crane',
 ): Interval {
   return required(
-    windowOf(form, depthMeasure(form), ['in favour'], { continuity, method }),
+    windowOf(form, depthMeasure(form), ['in favour'], { continuity, method, haunched: false }),
     form,
     `depth band of ${continuity} spans`,
   );
@@ -139,6 +139,16 @@ export function depthBand(
 /** Published band of midspan depth over span for forms of varying depth; null for the others. */
 export function midspanDepthBand(form: FormId): Interval | null {
   return windowOf(form, 'midspanDepthRatio', ['in favour']);
+}
+
+/** Published bands of depth over span at midspan and over the piers where a form is haunched by choice; null for the others. */
+export function haunchedDepthBands(
+  form: FormId,
+): { readonly midspan: Interval; readonly pier: Interval } | null {
+  const haunched = { continuity: 'continuous', haunched: true };
+  const midspan = windowOf(form, 'midspanDepthRatio', ['in favour'], haunched);
+  const pier = windowOf(form, 'depthRatio', ['in favour'], haunched);
+  return midspan && pier && { midspan, pier };
 }
 
 /** Band of floor depth over deck width for forms that carry the road between two main members; null for the others. */

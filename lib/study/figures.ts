@@ -176,6 +176,7 @@ export const studyFigures: readonly Descriptor[] = [
     typedOrPreset,
   ),
   typed('kept/:i/depthM', 'depth typed for the option', 'm'),
+  typed('kept/:i/variant/haunchRatio', 'depth over the piers over that at midspan, typed for the option', ''),
   typed(
     'kept/:i/units/:unit/supportsM/:s',
     (at) => `chainage of support ${at.index('s') + 1}, set by hand`,

@@ -167,6 +167,11 @@ const unit = z.strictObject({
   pylons: z.array(z.int().min(0).max(4999)).min(1).max(20).exactOptional(),
 });
 
+const variant = z.strictObject({
+  haunchRatio: z.number().gt(1).max(4).exactOptional(),
+  substringers: z.literal(true).exactOptional(),
+});
+
 const options = z.strictObject({
   forms: forms.default([]),
   workOutAnyway: forms.default([] as FormId[]),
@@ -189,6 +194,7 @@ const options = z.strictObject({
         method: z.enum(methodIds),
         units: z.array(unit).min(1).max(100),
         depthM: z.number().positive().max(100).nullable().default(null),
+        variant: variant.exactOptional(),
         locked: z.array(z.int().min(1).max(4999)).max(5000).exactOptional(),
       }),
     )

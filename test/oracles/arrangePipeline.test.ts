@@ -8,7 +8,7 @@ import { finish } from '../../lib/appraise/work.ts';
 import { workbench, type Workbench } from '../../lib/appraise/workbench.ts';
 import { proposalsFor } from '../../lib/appraise/proposals.ts';
 import { PIER_HALF_WIDTH_M } from '../../lib/appraise/requestFor.ts';
-import { workOption } from '../../lib/appraise/workOption.ts';
+import { workOption } from '../../lib/appraise/cheapestOption.ts';
 import type { FormId, MethodId } from '../../lib/model/index.ts';
 import { expectedLines } from '../../lib/substructure/index.ts';
 import { lowFerry } from '../appraise/studies.ts';

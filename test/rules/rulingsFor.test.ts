@@ -53,7 +53,13 @@ describe('rulingsFor(askedOf, form, facts)', () => {
 
   it('[R6] depth outside its published band is to be confirmed, inside it is in favour, and silent for other spans', () => {
     const at = (depthRatio: number, continuity: 'simple' | 'continuous') =>
-      rulingsFor('option', 'composite-i', { ...site, continuity, method: 'crane', depthRatio });
+      rulingsFor('option', 'composite-i', {
+        ...site,
+        continuity,
+        method: 'crane',
+        haunched: false,
+        depthRatio,
+      });
     expect(by(at(0.04, 'continuous'), 'composite-i-depth-continuous')?.effect).toBe('in favour');
     expect(by(at(0.08, 'continuous'), 'composite-i-depth-continuous')?.effect).toBe('to confirm');
     expect(by(at(0.08, 'continuous'), 'composite-i-depth-simple')).toBeUndefined();

@@ -45,6 +45,8 @@ const schema = z.object({
   haunch: z.object({
     parabolic: z.object({ over: number, power: number }),
     straight: z.object({ over: number, power: number }),
+    fromSpanM: number,
+    ratios: z.array(number),
     source,
   }),
   plateChangeKg: cited,
@@ -99,7 +101,7 @@ const schema = z.object({
     channelKgPerM: number,
     source,
   }),
-  substringers: z.object({ frameDepthOverGirder: number, strutShare: number, source }),
+  substringers: z.object({ fromSpanM: number, frameDepthOverGirder: number, strutShare: number, source }),
   stiffeners: z.object({
     widthBaseM: number,
     widthPerHeight: number,

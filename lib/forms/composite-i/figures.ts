@@ -21,7 +21,7 @@ const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/wid
 
 const midPlates = (at: At) =>
   ({
-    height: `${at.unit}/figures/girderHeightM`,
+    height: `${at.unit}/figures/${at.design.figures['middleHeightM'] === undefined ? 'girderHeightM' : 'middleHeightM'}`,
     topWidth: `${at.unit}/figures/topFlangeWidthM`,
     bottomWidth: `${at.unit}/figures/bottomFlangeWidthM`,
     top: `${at.unit}/figures/midspanTopFlangeM`,
@@ -35,7 +35,7 @@ export const compositeFigures: readonly Descriptor[] = [
     'girders',
     'girders',
     'no',
-    'two up to the widest deck of a twin, else by the widest spacing; or as asked',
+    'two up to the widest deck of a twin, else by the widest span of the slab between girders and substringers; or as asked',
     './task/deck/widthM',
     'data/composite-i/twin/mostWidthM',
     'data/composite-i/multi/mostSpacingM',
@@ -64,6 +64,14 @@ export const compositeFigures: readonly Descriptor[] = [
     }),
     compute: ({ depth, slab, least }) => Math.max(least, depth - slab),
   }),
+  sized(
+    'middleHeightM',
+    'height of the girder over the middle stretch of the longest span',
+    'm',
+    'height at midspan and the rise of the haunch towards the end of the stretch, mean',
+    'girderHeightM',
+    'pierGirderHeightM',
+  ),
   sized(
     'pierGirderHeightM',
     'height of the girder over its piers',

@@ -12,7 +12,8 @@ export interface GirderLayout {
 }
 
 /**
- * Girder lines of a deck: two with cross-girders up to `twin.mostWidthM`, more beyond; `task.girders` overrides.
+ * Girder lines of a deck: two with cross-girders up to `twin.mostWidthM`, more beyond, at twice the spacing where
+ * substringers stand between them; `task.girders` overrides.
  * @throws RangeError when fewer than two girders or part of a girder are asked for, or substringers between two.
  */
 export function girderLayout(task: UnitTask): GirderLayout {
@@ -23,7 +24,9 @@ export function girderLayout(task: UnitTask): GirderLayout {
     throw new RangeError(
       `girders: expected a whole number, 2 or more, received ${asked}; leave it out for the usual count`,
     );
-  const many = Math.max(3, Math.ceil(widthM / multi.mostSpacingM - 2 * multi.overhangOverSpacing - 1e-9) + 1);
+  // Beams midway between the girders carry the slab as well.
+  const mostSpacingM = (task.substringers ? 2 : 1) * multi.mostSpacingM;
+  const many = Math.max(3, Math.ceil(widthM / mostSpacingM - 2 * multi.overhangOverSpacing - 1e-9) + 1);
   const count = asked ?? (widthM <= twin.mostWidthM ? 2 : many);
   if (task.substringers && count < 3)
     throw new RangeError(

@@ -36,7 +36,12 @@ export function girderFiguresOf(model: GirderModel, girder: SizedGirder): Record
     girders: model.layout.count,
     spacingM: model.layout.spacingM,
     girderHeightM: model.girderM,
-    ...(model.heights.haunched ? { pierGirderHeightM: Math.max(...model.heights.atStationM) } : {}),
+    ...(model.heights.haunched
+      ? {
+          pierGirderHeightM: Math.max(...model.heights.atStationM),
+          middleHeightM: run.heightM[middle]!,
+        }
+      : {}),
     ...(model.substringers ? { substringerKgM: model.substringers.beam.massKgPerM } : {}),
     slabMeanM: model.slab.meanM,
     slabAtGirderM: model.slab.rootM,

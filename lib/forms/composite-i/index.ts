@@ -8,6 +8,7 @@ import { girderDepthAlong, girderElevation, girderSections } from './girderDrawi
 import { girderFiguresOf, ownWeightShare } from './girderReport.ts';
 import { girderLines } from './girderLines.ts';
 import { girderModel } from './girderModel.ts';
+import { girderVariants } from './girderVariants.ts';
 import { girderReactions } from './girderReactions.ts';
 import { sizeGirder } from './sizeGirder.ts';
 
@@ -25,6 +26,7 @@ export const compositeI: FormModule = {
   pattern: { kind: 'continuous' },
   methods: ['crane', 'launch'],
   ignoresHeight: true,
+  variants: girderVariants,
   size,
 };
 

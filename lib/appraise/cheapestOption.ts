@@ -1,0 +1,100 @@
+import { formModule } from '../forms/index.ts';
+import type { Option, Unit, Variant } from '../model/index.ts';
+import { depthRange } from './depthRange.ts';
+import { leastCostDepth, type DepthTrial } from './leastCostDepth.ts';
+import type { Work } from './work.ts';
+import type { Workbench } from './workbench.ts';
+import { depthsOf, mainUnit, spansOf, trialAt, workOptionAt, type Worked } from './workOption.ts';
+
+/** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
+const OVER_DECK_ALONE = 1.15;
+/** A variant has to save this share of the cost: the curve is flat and the choice must not jitter. */
+const PAYS = 0.01;
+/** A variant at the depth where it is first tried may be this much dearer and still have its own depth sought. */
+const PROMISES = 1.03;
+/** Midspan depth at which a variant is first tried over the best of constant depth. */
+const FIRST_TRY = { haunched: 0.9, straight: 1.2 } as const;
+
+/** Depth of least cost of an option made one way, m, and what it comes to. */
+interface Made {
+  readonly option: Option;
+  readonly depthM: number;
+  readonly trial: DepthTrial;
+}
+
+const fits = ({ utilisation }: DepthTrial): boolean => utilisation <= 1;
+
+/** Cost of a trial that is too weak counts as many times as it is overloaded: what it lacks has its price. */
+const worth = ({ cost, utilisation }: DepthTrial): number => cost * Math.max(1, utilisation);
+
+const isBetter = (one: DepthTrial, than: DepthTrial): boolean =>
+  fits(one) === fits(than) ? worth(one) < (1 - PAYS) * worth(than) : fits(one);
+
+/**
+ * Depths worth trying, m: the published band of how the option is made; of a plain one no more than somewhat over that of
+ * least deck cost, since clearance, road and supports only ever ask for less depth than the deck alone.
+ */
+function depthsToTry(bench: Workbench, option: Option, main: Unit): readonly [least: number, most: number] {
+  const spans = spansOf(main);
+  const { variant = {} } = option;
+  const [least, most] = depthRange(main.form, option.method, spans, bench.site.deck, variant);
+  if (variant.substringers) return [least, most];
+  const deckAlone = bench.tables.tableFor(option).depthM(main.form, Math.max(...spans));
+  return [least, Math.max(least, Math.min(most, OVER_DECK_ALONE * deckAlone))];
+}
+
+/** The shallowest depth within 1 % of the least cost of the whole crossing at mean rates. */
+function* atBestDepth(bench: Workbench, option: Option, nearM: number): Work<Made> {
+  const main = mainUnit(option.units);
+  const tryAt = (depthM: number): DepthTrial => trialAt(bench, option, depthM);
+  const depthM = yield* leastCostDepth(depthsToTry(bench, option, main), tryAt, nearM);
+  return { option, depthM, trial: tryAt(depthM) };
+}
+
+/**
+ * The cheapest way of making an option: plain, or one of the variants of its form where that saves more than 1 %. Every
+ * variant is tried once; only for the best of them, where it promises anything, the depth is sought again.
+ */
+function* cheapestMade(bench: Workbench, plain: Made): Work<Made> {
+  const { form, method, units, depthM: typedM } = plain.option;
+  const main = mainUnit(units);
+  const tried: Made[] = [];
+  for (const variant of formModule(form).variants?.(spansOf(main), bench.site.deck, method) ?? []) {
+    const option: Option = { ...plain.option, variant };
+    const depthM = typedM ?? firstTryM(bench, option, variant, plain.depthM);
+    tried.push({ option, depthM, trial: trialAt(bench, option, depthM) });
+    yield;
+  }
+  if (tried.length === 0) return plain;
+  const best = tried.reduce((one, other) => (worth(other.trial) < worth(one.trial) ? other : one));
+  if (typedM !== null) return isBetter(best.trial, plain.trial) ? best : plain;
+  if (!(worth(best.trial) < PROMISES * worth(plain.trial))) return plain;
+  const made = yield* atBestDepth(bench, best.option, best.depthM);
+  return isBetter(made.trial, plain.trial) ? made : plain;
+}
+
+function firstTryM(bench: Workbench, option: Option, { haunchRatio }: Variant, plainM: number): number {
+  const [least, most] = depthsToTry(bench, option, mainUnit(option.units));
+  const share = haunchRatio === undefined ? FIRST_TRY.straight : FIRST_TRY.haunched;
+  return Math.round(Math.min(most, Math.max(least, share * plainM)) * 20) / 20;
+}
+
+/**
+ * Works out one option: designs of its units, road profile, supports, take-off and programme. A depth that the option
+ * leaves open is the shallowest within 1 % of the least cost of the whole crossing inside the published band; how its main
+ * unit is made, where that is open, is the cheapest at mean rates. Pauses after each depth tried.
+ *
+ * @throws RangeError where a form cannot be sized for what it is asked
+ */
+export function* workOption(bench: Workbench, option: Option): Work<Worked> {
+  const main = mainUnit(option.units);
+  const first: Option = { ...option, variant: option.variant ?? {} };
+  const nearM = bench.tables.tableFor(option).depthM(main.form, Math.max(...spansOf(main)));
+  const { depthM } = option;
+  const plain =
+    depthM === null
+      ? yield* atBestDepth(bench, first, nearM)
+      : { option: first, depthM, trial: trialAt(bench, first, depthM) };
+  const made = option.variant === undefined ? yield* cheapestMade(bench, plain) : plain;
+  return workOptionAt(bench, made.option, depthsOf(bench, made.option, made.depthM));
+}

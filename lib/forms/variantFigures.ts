@@ -1,0 +1,53 @@
+import { described, type At, type Descriptor } from '../model/index.ts';
+
+const kept = (at: At): number => at.study.options.kept.findIndex(({ number }) => number === at.option.number);
+const isTyped = (at: At): boolean => at.study.options.kept[kept(at)]?.variant?.haunchRatio !== undefined;
+const unit = (steps: string): string => `options/:option/designs/:unit/${steps}`;
+const path = 'options/:option/variant/haunchRatio';
+const label = 'depth over the inner supports over that at midspan';
+
+/** How the main unit of an option is made where its form leaves a choice, and what the haunched unit is sized for. */
+export const variantFigures: readonly Descriptor[] = [
+  described({
+    path,
+    when: isTyped,
+    label,
+    unit: '',
+    method: 'set by hand',
+    formula: 'as typed',
+    inputs: (at) => ({ typed: `kept/${kept(at)}/variant/haunchRatio` }),
+    compute: ({ typed }) => typed,
+  }),
+  described({
+    path,
+    label,
+    unit: '',
+    method: 'least cost',
+    formula:
+      'of constant depth and the published ratios of pier to midspan depth, the cheapest crossing; constant unless another saves more than 1 %',
+    inputs: (at) => ({
+      ratios: [`data/${at.option.form}/haunch/ratios/0`, `data/${at.option.form}/haunch/ratios/1`],
+      from: `data/${at.option.form}/haunch/fromSpanM`,
+    }),
+  }),
+  described({
+    path: unit('task/haunch/pierDepthM'),
+    label: 'structural depth asked for over the inner supports',
+    unit: 'm',
+    method: 'ratio',
+    formula: 'depth at midspan x ratio of the haunch, to 50 mm',
+    inputs: (at) => ({ depth: `${at.unit}/task/depthM`, ratio: `${at.root}/variant/haunchRatio` }),
+    compute: ({ depth, ratio }) => Math.round(depth * ratio * 20) / 20,
+  }),
+  described({
+    path: unit('depthM/support'),
+    when: (at) =>
+      at.design.task.haunch !== undefined && at.design.depthM.support !== at.design.depthM.midspan,
+    label: 'structural depth over the inner supports',
+    unit: 'm',
+    method: 'as asked',
+    formula: 'depth the unit is sized for over its inner supports',
+    inputs: (at) => ({ asked: `${at.unit}/task/haunch/pierDepthM` }),
+    compute: ({ asked }) => asked,
+  }),
+];

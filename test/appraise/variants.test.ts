@@ -1,0 +1,147 @@
+import { describe, expect, it } from 'vitest';
+import { workOption } from '../../lib/appraise/cheapestOption.ts';
+import { keptUnits } from '../../lib/appraise/keptUnits.ts';
+import { memory } from '../../lib/appraise/memory.ts';
+import { finish } from '../../lib/appraise/work.ts';
+import { workbench, type Workbench } from '../../lib/appraise/workbench.ts';
+import { girderVariants } from '../../lib/forms/composite-i/girderVariants.ts';
+import { appraiseKept, appraise, survey, type Option, type Study, type Variant } from '../../lib/index.ts';
+import { expectedLines } from '../../lib/substructure/index.ts';
+import { lowFerry } from './studies.ts';
+
+/** An invented channel crossed by four spans of composite girders, its deck of some lanes; the road lies as low as it may. */
+function channel(lanes: number, mainM: number): Study {
+  const study = lowFerry();
+  const { brief, options, books } = study;
+  const endM = 3.5 * mainM;
+  const strip = (kind: 'parapet' | 'lane', widthM: number) => ({ kind, widthM, ultimateWidthM: widthM });
+  const [plain] = brief.groundStretches;
+  return {
+    ...study,
+    books: { ...books, draws: 100 },
+    options: { ...options, forms: ['composite-i'] },
+    brief: {
+      ...brief,
+      deck: [
+        strip('parapet', 0.5),
+        ...Array.from({ length: lanes }, () => strip('lane', 3.5)),
+        strip('parapet', 0.5),
+      ],
+      crossing: {
+        ...brief.crossing,
+        startM: 0,
+        endM,
+        ground: [
+          { chainageM: 0, levelM: 8 },
+          { chainageM: 0.2 * endM, levelM: 0 },
+          { chainageM: 0.8 * endM, levelM: 0 },
+          { chainageM: endM, levelM: 8 },
+        ],
+      },
+      road: { ...brief.road, startLevelM: 10, endLevelM: 10, mayRiseM: 20, fixedEnd: 'none' },
+      waters: [],
+      obstacles: [],
+      groundStretches: [{ fromM: 0, toM: endM, known: true, classes: [plain!.classes[0]!] }],
+    },
+  };
+}
+
+const optionOn = (mainM: number, variant?: Variant): Option => ({
+  number: 1,
+  form: 'composite-i',
+  method: 'crane',
+  units: [
+    {
+      form: 'composite-i',
+      role: 'main',
+      supportsM: [0, 0.75 * mainM, 1.75 * mainM, 2.75 * mainM, 3.5 * mainM],
+    },
+  ],
+  depthM: null,
+  origin: 'kept',
+  ...(variant && { variant }),
+});
+
+const workOut = (bench: Workbench, mainM: number, variant?: Variant) => {
+  const { option } = finish(workOption(bench, optionOn(mainM, variant)));
+  const foundations = option.supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
+  return { option, cost: bench.costOf([...option.lines, ...foundations]) };
+};
+
+describe('workOption(option whose way of making is open)', () => {
+  it.each([
+    [2, 60],
+    [2, 110],
+    [4, 60],
+    [6, 100],
+  ])('is never dearer than its own plain girders: %i lanes over %i m', (lanes, mainM) => {
+    const bench = workbench(channel(lanes, mainM));
+    const open = workOut(bench, mainM);
+    const plain = workOut(bench, mainM, {});
+    expect(open.cost).toBeLessThanOrEqual(plain.cost);
+    expect(open.option.designs[0]!.limitingCheck.utilisation).toBeLessThanOrEqual(1);
+    // What is not plain has to be worth it.
+    const isPlain = Object.keys(open.option.variant!).length === 0;
+    expect(open.cost < 0.99 * plain.cost).toBe(!isPlain);
+  });
+
+  it('takes substringers and fewer girders on a wide deck over long spans', () => {
+    const bench = workbench(channel(5, 100));
+    const { option } = workOut(bench, 100);
+    const plain = workOut(bench, 100, {}).option;
+    expect(option.variant!.substringers).toBe(true);
+    const [made, level] = [option.designs[0]!, plain.designs[0]!];
+    expect(made.figures['girders']).toBeLessThan(level.figures['girders']!);
+    expect(made.lines.some(({ what }) => what === 'substringers')).toBe(true);
+    expect(made.sections[0]!.shapes.some(({ part }) => part === 'substringer')).toBe(true);
+  });
+
+  it('looks at nothing else on short spans, and at no haunch on a launched deck', () => {
+    const { deck } = survey(channel(5, 45).brief);
+    expect(girderVariants([33, 45, 45, 33], deck, 'crane')).toEqual([]);
+    expect(girderVariants([70, 90, 70], deck, 'launch')).toEqual([{ substringers: true }]);
+    expect(girderVariants([90], deck, 'crane')).toEqual([{ substringers: true }]);
+  });
+});
+
+describe('workOption(variant that was chosen)', () => {
+  it('keeps to it, in depth, drawing and price', () => {
+    const bench = workbench(channel(2, 60));
+    const { option } = workOut(bench, 60, { haunchRatio: 2 });
+    const [design] = option.designs;
+    expect(option.variant).toEqual({ haunchRatio: 2 });
+    expect(option.depthM.support).toBeCloseTo(2 * option.depthM.midspan, 1);
+    // Published bands of pier and midspan depth: 1/25 to 1/18 and 1/50 to 1/30.
+    expect(option.depthM.midspan / 60).toBeLessThanOrEqual(0.0334);
+    expect(option.depthM.support / 60).toBeLessThanOrEqual(0.057);
+    expect(Math.max(...design!.depthAlong.depthM)).toBeCloseTo(option.depthM.support, 9);
+  });
+
+  it('is refused where the form has none', () => {
+    const study = lowFerry();
+    const site = survey(study.brief);
+    const { startM, endM } = site;
+    const units = [{ form: 'concrete-box', role: 'main', supportsM: [startM, endM] }] as const;
+    const placed = keptUnits(site, { form: 'concrete-box', units, variant: { haunchRatio: 2 } });
+    expect(placed).toMatchObject({
+      because: [expect.stringMatching(/no haunch or substringers expected/u)],
+    });
+  });
+});
+
+it('appraiseKept(haunched option) drags it as it is made', () => {
+  const study = channel(4, 60);
+  const kept = memory();
+  const { number, form, method, units } = optionOn(60);
+  const asked: Study = {
+    ...study,
+    options: {
+      ...study.options,
+      kept: [{ number, form, method, units, depthM: null, variant: { haunchRatio: 1.6 } }],
+    },
+  };
+  const option = appraise(asked).options.find((one) => one.number === 1)!;
+  const dragged = appraiseKept(study, option, kept).option!;
+  expect(dragged.designs).toEqual(option.designs);
+  expect(dragged.cost).toEqual(option.cost);
+});
