@@ -1,9 +1,10 @@
 import type { BillPart, Family, FormId, MethodId } from './ids.ts';
-import type { Design, DepthPair, MeasuredLine, Quantities, Variant } from './design.ts';
+import type { Design, DepthPair, MeasuredLine, Quantities } from './design.ts';
 import type { Dropped, Ruling } from './ruling.ts';
 import type { RoadProfile, Site } from './site.ts';
 import type { RegisterEntry, Unit } from './study.ts';
 import type { DroppedCount } from './option.ts';
+import type { Variant } from './variant.ts';
 
 /** Low, likely and high: 10, 50 and 90 % of the draws. */
 export interface Spread {

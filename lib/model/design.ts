@@ -27,14 +27,6 @@ export interface UnitTask {
   readonly clearUnderM?: readonly number[];
 }
 
-/** How the main unit of an option is made where its form leaves a choice; empty = constant depth under a plain slab. */
-export interface Variant {
-  /** Depth over the inner supports over the depth at midspan, above 1: a parabola between them. */
-  readonly haunchRatio?: number;
-  /** Beams between the girders, so that fewer girders carry the slab. */
-  readonly substringers?: true;
-}
-
 /** Depth law of haunched girders. */
 export interface Haunch {
   /** Structural depth over inner supports, m. */

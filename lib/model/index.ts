@@ -2,6 +2,7 @@ export * from './ids.ts';
 export * from './pattern.ts';
 export * from './study.ts';
 export * from './site.ts';
+export * from './variant.ts';
 export * from './design.ts';
 export * from './option.ts';
 export * from './ruling.ts';

@@ -1,5 +1,5 @@
 import type { FormId, MethodId } from './ids.ts';
-import type { Variant } from './design.ts';
+import type { Variant } from './variant.ts';
 import type { Unit } from './study.ts';
 
 /** An option: form, arrangement, depth and method of construction. */

@@ -1,4 +1,4 @@
-import type { Variant } from './design.ts';
+import type { Variant } from './variant.ts';
 import type { FormId, GroundClassId, MethodId, StandardId } from './ids.ts';
 
 /**
