@@ -18,7 +18,7 @@ function between(grid: readonly number[], value: number): readonly [index: numbe
 export interface TableShelf {
   /** The table the search of one form uses: the form by its method and its approach form by the usual one. */
   readonly tableFor: (asked: FormAndMethod) => CostTable;
-  /** The rows that the table of one form is read off: its own and those of its approach. */
+  /** The rows that the table of one form is read off: its own and those of its approaches. */
   readonly rowsOf: (asked: FormAndMethod) => readonly TrialRows[];
 }
 
@@ -78,12 +78,10 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
   return {
     tableFor,
     rowsOf(asked) {
-      const { pattern, alsoPattern } = formModule(asked.form);
-      const approach = pattern.kind === 'continuous' ? alsoPattern?.approach : pattern.approach;
-      return [
-        rowsFor(asked),
-        ...(approach !== undefined && isOpen(approach) ? [rowsFor(usual(approach))] : []),
-      ];
+      const { pattern, alsoPatterns = [] } = formModule(asked.form);
+      const patterns = pattern.kind === 'continuous' ? alsoPatterns : [pattern];
+      const approaches = patterns.map(({ approach }) => approach).filter(isOpen);
+      return [rowsFor(asked), ...approaches.map((approach) => rowsFor(usual(approach)))];
     },
   };
 }

@@ -53,9 +53,9 @@ export function* proposalsFor(bench: Workbench, form: FormId): Work<Proposals> {
 
 /** Patterns of a form that are searched on a site: approaches to a flanked unit need something to lead up to and their own spans. */
 function patternsFor(site: Site, form: FormId): readonly Pattern[] {
-  const { pattern, alsoPattern } = formModule(form);
-  const also = alsoPattern && site.mainOpening && openSpans(alsoPattern.approach, site.lengthM);
-  return also ? [pattern, alsoPattern] : [pattern];
+  const { pattern, alsoPatterns = [] } = formModule(form);
+  if (site.mainOpening === null) return [pattern];
+  return [pattern, ...alsoPatterns.filter(({ approach }) => openSpans(approach, site.lengthM))];
 }
 
 const supportsOf = ({ units }: Arrangement): number =>

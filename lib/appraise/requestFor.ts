@@ -54,8 +54,10 @@ export function requestFor(
   };
 }
 
-/** The pattern of a row of units of a form: that of the form, or the other one that the form has when there are approaches. */
+/** The pattern of a row of units of a form: that of the form, or of its others the one that has such approaches. */
 export function patternOf(form: FormId, units: readonly Unit[]): Pattern {
-  const { pattern, alsoPattern } = formModule(form);
-  return alsoPattern && units.some(({ role }) => role === 'approach') ? alsoPattern : pattern;
+  const { pattern, alsoPatterns = [] } = formModule(form);
+  const approach = units.find(({ role }) => role === 'approach');
+  if (approach === undefined) return pattern;
+  return alsoPatterns.find((also) => also.approach === approach.form) ?? alsoPatterns[0] ?? pattern;
 }

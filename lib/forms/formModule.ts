@@ -18,8 +18,8 @@ export interface FormModule {
   /** Name as it is printed, e.g. 'Composite I-girders'. */
   readonly name: string;
   readonly pattern: Pattern;
-  /** Another pattern that is searched as well: a long crossing need not be one form from abutment to abutment. */
-  readonly alsoPattern?: Extract<Pattern, { kind: 'flanked' }>;
+  /** Other patterns that are searched as well: a long crossing need not be one form from abutment to abutment. */
+  readonly alsoPatterns?: readonly Extract<Pattern, { kind: 'flanked' }>[];
   /** Methods of construction, the usual one first. */
   readonly methods: readonly [MethodId, ...MethodId[]];
   /** Longest span that `size` can lay out, m, where that is less than the published band of the form. */

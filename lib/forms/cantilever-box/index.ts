@@ -21,7 +21,11 @@ export const cantileverBox: FormModule = {
   family: 'box',
   name: 'Cantilevered concrete box',
   pattern: { kind: 'continuous' },
-  alsoPattern: { kind: 'flanked', approach: 'concrete-box', side: [0.55, 0.7] },
+  // Concrete all the way, or lighter approaches: on soft ground the weight of a deck is paid for once more below it.
+  alsoPatterns: [
+    { kind: 'flanked', approach: 'concrete-box', side: [0.55, 0.7] },
+    { kind: 'flanked', approach: 'composite-i', side: [0.55, 0.7] },
+  ],
   methods: ['balanced-cantilever'],
   size,
 };

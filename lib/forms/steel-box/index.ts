@@ -24,7 +24,7 @@ export const steelBox: FormModule = {
   family: 'box',
   name: 'Steel box girder',
   pattern: { kind: 'continuous' },
-  alsoPattern: { kind: 'flanked', approach: 'composite-i', side: [0.6, 0.8] },
+  alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.8] }],
   methods: ['balanced-cantilever', 'launch'],
   size,
 };
