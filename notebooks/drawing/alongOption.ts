@@ -27,7 +27,7 @@ export const roadLevel = (option: WorkedOption, chainageM: number): number =>
   roadLevelAt(option.profile, chainageM);
 
 /** How far a straight stroke may lie beside a curve of the road, px. */
-const besideCurvePx = 0.25;
+const besideCurvePx = 0.02;
 
 /**
  * Chainages between two others, they excluded, at which a line that follows the road has to bend so that straight strokes

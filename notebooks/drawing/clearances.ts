@@ -103,6 +103,7 @@ function envelopePiece(
   const foot = frame.y(one.footLevelM);
   const cut = one.railway ? Math.min(5, (right - left) / 4, (foot - top) / 3) : 0;
   const outline = el('path', {
+    'data-part': 'envelope',
     d: pathOf([
       [left, foot],
       [left, top + cut],
@@ -147,9 +148,17 @@ function envelopePiece(
   const sides = [
     { left: right + 3, right: right + 3 + wide, ...box },
     { left: left - 3 - wide, right: left - 3, ...box },
+    // Within it where it is wide enough, off what crosses below its middle.
+    ...(right - left > 1.3 * wide
+      ? [
+          { left: right - 3 - wide, right: right - 3, ...box },
+          { left: left + 3, right: left + 3 + wide, ...box },
+        ]
+      : []),
   ];
-  const atLeft = room.choose(sides) === 1;
-  const x = atLeft ? left - 7 : right + 7;
+  const place = Math.max(0, room.choose(sides));
+  const atLeft = place === 1 || place === 2;
+  const x = [right + 7, left - 7, right - 7, left + 7][place] ?? right + 7;
   return g(
     {},
     outline,

@@ -10,8 +10,9 @@ import { barredDimension, barredWash, clearances, envelopes } from './clearances
 import type { Room } from './crossingLetters.ts';
 import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
+import { datumBelow, datumLine } from './datumLine.ts';
 import { dimensionChain } from './dimension.ts';
-import { chainagesShown, crossingScale, elevationBody, levelRange, optionWords } from './elevation.ts';
+import { chainagesShown, elevationBody, levelRange, optionWords, scaleOnSheet } from './elevation.ts';
 import type { Frame } from './frame.ts';
 import { frameOf } from './frame.ts';
 import type { Paper } from './ink.ts';
@@ -31,7 +32,7 @@ import {
 } from './pierHandles.ts';
 import { placer } from './placer.ts';
 import type { Piece } from './piece.ts';
-import { el, g, num } from './piece.ts';
+import { el, g } from './piece.ts';
 import type { Scale } from './scale.ts';
 import { pxPerMetre } from './scale.ts';
 import { scaleBar } from './scaleBar.ts';
@@ -133,8 +134,7 @@ export function crossing(input: CrossingInput): Piece {
   const { site, option, widthPx } = input;
   const paper = input.paper ?? 'colour';
   const prefix = input.prefix ?? 'crossing';
-  const scale =
-    input.scale ?? crossingScale(site, widthPx, widthPx < 700 ? 2 : widthPx < 960 ? 5 : undefined);
+  const scale = input.scale ?? scaleOnSheet(site, widthPx);
   const small = scale >= 2000;
   const withBand = input.band ?? (scale <= 2000 && widthPx >= 700);
   const withBar = input.bar ?? true;
@@ -174,10 +174,11 @@ export function crossing(input: CrossingInput): Piece {
     .map((at, index) => (small ? length(at - (inside[index] ?? at)) : fixed(at - (inside[index] ?? at), 1)));
   const changes = option === null ? [] : spanChanges(option, input.handles?.hold ?? null);
   const total = fixed(site.lengthM, 1);
+  const datum = datumBelow(frame, bottomY + 5);
   const band = withBand
-    ? dataBand(site, option, frame, bottomY + 6, { accent: ink.accent, datumM: Math.floor(range.bottomM) })
+    ? dataBand(site, option, frame, datum.y, { accent: ink.accent, datumM: datum.levelM })
     : null;
-  const afterBand = bottomY + 6 + (band?.height ?? 0);
+  const afterBand = datum.y + (band?.height ?? 0);
   const height = afterBand + (withBar ? (width < 620 ? 56 : 42) : 4);
   const clip = `${prefix}-window`;
   const figureWidth = Math.max(...figures.map((figure) => textWidth(figure, letters.table)));
@@ -269,12 +270,7 @@ export function crossing(input: CrossingInput): Piece {
           rightPx: width,
           widthPx: Math.min(400, width * 0.7),
         }),
-      !withBand &&
-        el('path', {
-          d: `M0,${num(bottomY + 5)}H${num(width)}`,
-          stroke: colours.grid,
-          'stroke-width': pens.fine,
-        }),
+      !withBand && datumLine(frame, datum, pens.fine),
     ],
     hands === undefined ? 'img' : 'group',
   );

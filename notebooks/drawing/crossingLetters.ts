@@ -66,6 +66,7 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
         clearance.toM + 4,
         clearance.toM + 11,
         clearance.toM + 15,
+        ...[0.7, 0.5, 0.3].map((part) => clearance.fromM + part * (clearance.toM - clearance.fromM)),
       ],
       levelM: clearance.datumLevelM,
       words: `${level(clearance.datumLevelM)} ${kind === 'railway' ? 'rail' : kind}`,
@@ -238,7 +239,7 @@ export function belowGround(
       candidates[
         room.placer.choose(
           candidates.map(({ x }) => levelMarkBox(x, y, stratum.words, 'right')),
-          900,
+          400,
         )
       ];
     if (chosen === undefined) return null;

@@ -10,6 +10,7 @@ import {
 } from './alongOption.ts';
 import type { Asked } from './asked.ts';
 import { overOf } from './asked.ts';
+import { datumLine } from './datumLine.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
@@ -149,8 +150,7 @@ export function dataBand(
     el('path', { d: `M${num(frame.left)},${num(at)}H${num(frame.right)}`, stroke, 'stroke-width': width });
   const piece = g(
     { class: 'band' },
-    label(frame.left + 2, y - 6, `datum ${level(style.datumM)}`, { fill: colours.second, halo: true }),
-    line(y, colours.ink, pens.medium),
+    datumLine(frame, { levelM: style.datumM, y }, pens.medium),
     el('path', {
       d: places.map((at) => `M${num(frame.x(at))},${num(y - 4)}v4`).join(''),
       stroke: colours.ink,

@@ -71,10 +71,11 @@ function strip(place: Place, kind: StripKind, fromM: number, toM: number, surfac
       ],
       true,
     );
-    return el('path', { d, fill: colours.ink });
+    return el('path', { 'data-part': kind, d, fill: colours.ink });
   }
   const top = Math.max(road(fromM), road(toM)) + heights.kerb;
   const kerb = el('path', {
+    'data-part': kind,
     d: pathOf(
       [
         [x(fromM), y(road(fromM) - surfacingM)],

@@ -4,6 +4,7 @@ import { formInk } from '../forms/formInk.ts';
 import { formLooks } from '../forms/formLook.ts';
 import type { AppraisedOption, Site } from '../model.ts';
 import { spansOf, structureTop } from './alongOption.ts';
+import { datumBelow, datumLine } from './datumLine.ts';
 import type { Frame } from './frame.ts';
 import { frameOf } from './frame.ts';
 import type { Paper } from './ink.ts';
@@ -93,6 +94,13 @@ export function chainagesShown(
 export const crossingScale = (site: Site, widthPx: number, margin = sideMargin): Scale =>
   largestScale(site.lengthM, widthPx - 2 * margin, 500);
 
+/** Scale of the crossing and of all that is drawn on its chainage, for a sheet of a given width. */
+export const scaleOnSheet = (site: Site, widthPx: number): Scale =>
+  crossingScale(site, widthPx, widthPx < 700 ? 2 : widthPx < 960 ? 5 : widthPx < 1200 ? sideMargin : 7);
+
+/** Whether a crossing is drawn at a larger scale when it takes the note margin too. */
+export const wantsWidth = (site: Site): boolean => scaleOnSheet(site, 1224) < scaleOnSheet(site, 980);
+
 export interface ElevationInput {
   readonly site: Site;
   readonly option: AppraisedOption;
@@ -119,7 +127,8 @@ export function elevation(input: ElevationInput): Piece {
   const ppm = pxPerMetre(scale);
   const top = 8;
   const frame = frameOf(scale, chainagesShown(site, widthPx, scale), 0, { levelM: range.topM, y: top });
-  const bottom = frame.y(range.bottomM);
+  const datum = datumBelow(frame, frame.y(range.bottomM) + 6);
+  const bottom = datum.y;
   const ink = formInk(
     input.paper ?? 'colour',
     option.units.map((unit) => unit.form),
@@ -130,6 +139,7 @@ export function elevation(input: ElevationInput): Piece {
   return sheet(widthPx, height, `Elevation of ${optionWords(option)}, 1 to ${String(scale)}`, [
     ink.defs.length > 0 && el('defs', {}, ink.defs),
     elevationBody(site, option, frame, ink, range, { plain }),
+    datumLine(frame, datum, pens.fine),
     withBar &&
       scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 24, {
         rightPx: widthPx,

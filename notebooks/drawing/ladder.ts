@@ -12,6 +12,7 @@ import { levelMark } from './levelMark.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { pxPerMetre } from './scale.ts';
+import { scaleBar } from './scaleBar.ts';
 import { sheet } from './sheet.ts';
 
 export interface LadderInput {
@@ -192,7 +193,7 @@ export function ladder(input: LadderInput): Piece {
   const datumWords = rail ? 'rail' : obstacle.kind === 'river' ? 'water' : obstacle.kind;
   return sheet(
     380,
-    v.yDatum + 24,
+    v.yDatum + 66,
     `Levels over ${obstacle.name} at chainage ${chainage(at)}: road ${level(v.road)}, lowest soffit ${level(v.soffit)}, lowest allowed ${level(v.least)}`,
     [
       ink.defs.length > 0 && el('defs', {}, ink.defs),
@@ -243,6 +244,12 @@ export function ladder(input: LadderInput): Piece {
           figure: leastLimit(site, at),
         }),
       Number.isFinite(datum) && levelMark(markX, v.yDatum, `${level(datum)} ${datumWords}`),
+      scaleBar(100, left, v.yDatum + 42, {
+        what: 'broken at the envelope,',
+        heights: false,
+        widthPx: 200,
+        rightPx: 380,
+      }),
     ],
   );
 }

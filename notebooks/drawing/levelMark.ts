@@ -36,7 +36,7 @@ export function levelMark(x: number, y: number, text: string, style: LevelMarkSt
     ? `M${num(x + half)},${num(y - height)}H${num(x - width)}`
     : `M${num(x - half)},${num(y - height)}H${num(x + width)}`;
   return g(
-    {},
+    { class: 'level-mark' },
     el('path', { d: shelf, stroke: colour, 'stroke-width': pens.fine, fill: 'none' }),
     el('path', {
       d: `M${num(x)},${num(y)}l${num(-half)},${num(-height)}h${num(2 * half)}Z`,

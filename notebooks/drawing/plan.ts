@@ -1,7 +1,7 @@
 import { fixed, length } from '../format.ts';
 import { formInk, type FormInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Foundation, Site, Support, Zone } from '../model.ts';
-import { chainagesShown, crossingScale, optionWords } from './elevation.ts';
+import { chainagesShown, optionWords, scaleOnSheet } from './elevation.ts';
 import { frameOf } from './frame.ts';
 import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
@@ -235,8 +235,7 @@ function zoneNames(zones: readonly Zone[], xOf: (zone: Zone) => number, ppm: num
 export function plan(input: PlanInput): Piece {
   const { site, option, widthPx } = input;
   const prefix = input.prefix ?? 'plan';
-  const scale =
-    input.scale ?? crossingScale(site, widthPx, widthPx < 700 ? 2 : widthPx < 960 ? 5 : undefined);
+  const scale = input.scale ?? scaleOnSheet(site, widthPx);
   const frame = frameOf(scale, chainagesShown(site, widthPx, scale), 0, { levelM: 0, y: 0 });
   const ppm = frame.pxPerM;
   const footings = option?.supports.map((support) => likeliest(support)?.footing.widthM ?? 0) ?? [];

@@ -41,7 +41,7 @@ export function scaleBar(scale: Scale, x: number, y: number, style: ScaleBarStyl
   const wordsX = x + end * ppm + textWidth(`${String(end)} m`, letters.drawing) + 24;
   const inside = wordsX + textWidth(words, letters.drawing) <= (style.rightPx ?? Infinity);
   return g(
-    {},
+    { class: 'scale-bar', 'data-scale': scale },
     places.slice(1).map((to, index) => {
       const from = places[index] ?? 0;
       return el('rect', {

@@ -50,6 +50,7 @@ function shapePiece(shape: Shape, place: SectionPlace, form: FormId, ink: FormIn
     const furniture = shape.part === 'parapet' || shape.part === 'barrier';
     const width = Math.max((shape.thicknessM ?? 0) * place.ppm, shape.faint === true ? 0.55 : pens.thin);
     return el('path', {
+      'data-part': shape.faint === true ? undefined : shape.part,
       d: pathOf(points),
       fill: 'none',
       stroke: furniture ? colours.ink : line,
@@ -68,13 +69,14 @@ function shapePiece(shape: Shape, place: SectionPlace, form: FormId, ink: FormIn
       )
       .join('');
   if (shape.faint === true) return el('path', { d, fill: 'none', stroke: line, 'stroke-width': 0.55 });
-  if (shape.material === 'surfacing') return el('path', { d, fill: colours.ink, stroke: 'none' });
+  const part = { 'data-part': shape.part, d };
+  if (shape.material === 'surfacing') return el('path', { ...part, fill: colours.ink, stroke: 'none' });
   if (shape.material === 'concrete') {
     const furniture = shape.part === 'edge strip';
     return g(
       {},
       el('path', {
-        d,
+        ...part,
         fill: furniture ? colours.sheet : ink.face(form),
         'fill-rule': 'evenodd',
         stroke: furniture ? colours.ink : line,
@@ -88,7 +90,7 @@ function shapePiece(shape: Shape, place: SectionPlace, form: FormId, ink: FormIn
   const box = extentOf([shape]);
   const large = Math.min(box.right - box.left, box.top - box.bottom) * place.ppm > 5;
   return el('path', {
-    d,
+    ...part,
     fill: large ? ink.face(form) : line,
     'fill-rule': 'evenodd',
     stroke: line,
@@ -149,7 +151,7 @@ export function cutPiece(
     const from = side === 'left' ? place.x(extent.left) - 20 : place.x(0);
     const to = side === 'left' ? place.x(0) : place.x(extent.right) + 20;
     return g(
-      {},
+      { 'data-at': cut.at },
       el(
         'clipPath',
         { id },
@@ -161,7 +163,9 @@ export function cutPiece(
   return g(
     { class: 'cut' },
     el('defs', {}, stipple(stippleId, ink.paper === 'black' ? colours.third : ink.line(form))),
-    cuts.right === null ? draw(cuts.left) : [half('left', cuts.left), half('right', cuts.right)],
+    cuts.right === null
+      ? g({ 'data-at': cuts.left.at }, draw(cuts.left))
+      : [half('left', cuts.left), half('right', cuts.right)],
     cuts.right !== null &&
       el('path', {
         d: `M${num(place.x(0))},${num(top - 6)}V${num(bottom + 6)}`,

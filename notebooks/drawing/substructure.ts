@@ -84,11 +84,16 @@ function foundationPiece(foundation: Foundation, atM: number, frame: Frame, styl
         'stroke-width': 0.5,
         'stroke-dasharray': '5 1.6 1.2 1.6',
       }),
-      el('path', { d: bodies + toes, 'stroke-width': pens.fine }),
+      el('path', {
+        'data-part': isCut ? 'piles, cut' : 'piles',
+        d: bodies + toes,
+        'stroke-width': pens.fine,
+      }),
     );
   }
   parts.push(
     el('path', {
+      'data-part': 'footing',
       d: box(frame, atM - footing.lengthM / 2, atM + footing.lengthM / 2, footing.topLevelM, underside),
       fill: colours.sheet,
       'stroke-width': pens.thin,
@@ -139,6 +144,7 @@ function pier(
     style.foundations !== false && foundation !== null && foundationPiece(foundation, at, frame, style),
     top > foot + 0.02 &&
       el('path', {
+        'data-part': 'shaft',
         d: box(frame, at - half, at + half, top, foot),
         fill: colours.sheet,
         'stroke-width': pens.thin,
@@ -146,6 +152,7 @@ function pier(
     gap > 0.05 &&
       gap < 3 &&
       el('path', {
+        'data-part': 'bearing',
         d: box(frame, at - bearing, at + bearing, soffit, support.topLevelM),
         fill: colours.ink,
         stroke: 'none',
@@ -225,7 +232,7 @@ function abutment(
   const from = Math.min(back, end);
   const to = Math.max(back, end);
   return g(
-    {},
+    { 'data-support': option.supports.indexOf(support) },
     style.foundations !== false &&
       to > from &&
       el('path', {
@@ -246,19 +253,30 @@ function abutment(
       'stroke-width': pens.fine,
     }),
     wallFoot === null &&
-      el('path', { d: pathOf(points, true), fill: colours.sheet, 'stroke-width': pens.thin }),
+      el('path', {
+        'data-part': 'abutment',
+        d: pathOf(points, true),
+        fill: colours.sheet,
+        'stroke-width': pens.thin,
+      }),
     // A wall in one with the deck is drawn with it; what goes on below its foot is drawn here.
     wallFoot !== null &&
       style.foundations !== false &&
       wallFoot > foot + 0.02 &&
       el('path', {
+        'data-part': 'wall',
         d: box(frame, Math.min(front, back), Math.max(front, back), wallFoot, foot),
         fill: colours.sheet,
         'stroke-width': pens.thin,
       }),
     wallFoot === null &&
       soffit > seat + 0.05 &&
-      el('path', { d: box(frame, at - 0.4, at + 0.4, soffit, seat), fill: colours.ink, stroke: 'none' }),
+      el('path', {
+        'data-part': 'bearing',
+        d: box(frame, at - 0.4, at + 0.4, soffit, seat),
+        fill: colours.ink,
+        stroke: 'none',
+      }),
     // The road goes on behind the abutment, on the fill or on the ground.
     el('path', {
       d: pathOf(

@@ -49,6 +49,7 @@ function shapePiece(
   if (shape.kind === 'line') {
     const width = Math.max((shape.thicknessM ?? 0) * frame.pxPerM, isCable ? pens.fine : pens.thin);
     return el('path', {
+      'data-part': shape.part,
       d: pathOf(points),
       fill: 'none',
       stroke: line,
@@ -59,6 +60,7 @@ function shapePiece(
   const d = pathOf(points, true) + holes.map((hole) => pathOf(hole, true)).join('');
   const thin = faceThickness(points) < solidBelowPx;
   return el('path', {
+    'data-part': shape.part,
     d,
     fill: thin || plain ? line : ink.face(placed.unit.form),
     'fill-rule': 'evenodd',
@@ -142,6 +144,7 @@ function soffitLine(
       ] as const,
   );
   return el('path', {
+    'data-part': 'soffit',
     d: pathOf(points),
     fill: 'none',
     stroke: ink.line(placed.unit.form),
@@ -184,6 +187,7 @@ export function superstructure(
     units.map((placed) => unitPiece(site, option, placed, ink, frame, plain)),
     !plain && units.map((placed) => soffitLine(site, option, placed, ink, frame)),
     el('path', {
+      'data-part': 'road',
       d: pathOf(along(from, to)),
       fill: 'none',
       stroke: colours.ink,
@@ -191,6 +195,7 @@ export function superstructure(
     }),
     !plain &&
       el('path', {
+        'data-part': 'parapet',
         d: pathOf(along(from - over, to + over, 1.1)) + postLines,
         fill: 'none',
         stroke: colours.second,

@@ -60,7 +60,12 @@ export function ground(
     { class: 'ground', fill: 'none', stroke: colours.ink },
     style.hatch !== false &&
       el('path', { d: groundHatch(points, 15, 6), stroke: colours.third, 'stroke-width': pens.fine }),
-    el('path', { d: pathOf(points), 'stroke-width': pen, 'stroke-linejoin': 'round' }),
+    el('path', {
+      'data-part': 'ground',
+      d: pathOf(points),
+      'stroke-width': pen,
+      'stroke-linejoin': 'round',
+    }),
   );
 }
 
@@ -114,7 +119,7 @@ function waterBody(site: Site, frame: Frame, water: WaterBody): Piece {
   });
   return g(
     { fill: 'none', stroke: colours.ink },
-    el('path', { d: surface, 'stroke-width': pens.thin }),
+    el('path', { 'data-part': 'water', d: surface, 'stroke-width': pens.thin }),
     el('path', { d: strokes, 'stroke-width': pens.fine, stroke: colours.second }),
   );
 }

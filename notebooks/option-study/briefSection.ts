@@ -1,5 +1,6 @@
 import type { Brief } from '../../lib/index.ts';
 import { crossing } from '../drawing/crossing.ts';
+import { wantsWidth } from '../drawing/elevation.ts';
 import { plan } from '../drawing/plan.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
@@ -36,6 +37,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
     title: 'Crossing',
     shows: { site, brief, books, reference, asItStands, hands },
     owns: [site],
+    wide: (v) => wantsWidth(v.site),
     body: (v, room) =>
       crossing({
         site: v.site,
@@ -86,6 +88,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
         station: '1+025',
         title: 'Plan',
         shows: { site, reference },
+        wide: (v) => wantsWidth(v.site),
         body: (v, room) =>
           plan({ site: v.site, option: v.reference, widthPx: room.widthPx, prefix: 'plan', bar: true }),
         notes: [

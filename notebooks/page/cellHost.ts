@@ -34,7 +34,7 @@ export interface CellSpec<U extends Uses> {
   readonly body: Part<U>;
   readonly notes?: Part<U>;
   /** Body takes the note margin too; notes go below. */
-  readonly wide?: boolean;
+  readonly wide?: boolean | ((values: Values<U>) => boolean);
   /** May run on over several printed sheets. */
   readonly long?: boolean;
 }
@@ -162,6 +162,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     const widthPx = paper?.widthPx ?? bodyPx;
     const values = 'value' in state ? state.value : undefined;
     if (values === undefined || widthPx === 0) return;
+    if (typeof spec.wide === 'function') element.classList.toggle('wide', spec.wide(values));
     const room = { widthPx, isPaper: paper !== null };
     const isSame =
       drawn?.values === values && drawn.room.widthPx === widthPx && drawn.room.isPaper === room.isPaper;

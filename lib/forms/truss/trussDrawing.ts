@@ -5,10 +5,10 @@ import { floorSection } from '../floor/floorShapes.ts';
 import type { SizedMember } from './sizeTruss.ts';
 import type { TrussSpan } from './trussSpan.ts';
 
-/** Height of the bottom chord axis over the top of the slab, m (negative): the chord lies with its foot in the soffit. */
+/** Height of the bottom chord axis over the top of the slab, m (negative): the deepest of the chord lies with its foot in the soffit. */
 function chordAxisZ(span: TrussSpan, depthM: number): number {
-  const bottom = span.truss.members.find(({ member }) => member.role === 'bottom-chord')!;
-  return -depthM + bottom.section.depthM / 2;
+  const chords = span.truss.members.filter(({ member }) => member.role === 'bottom-chord');
+  return -depthM + Math.max(...chords.map(({ section }) => section.depthM)) / 2;
 }
 
 /** Members, slab and cross-girders of one span in elevation, moved by `startM` along the unit. */

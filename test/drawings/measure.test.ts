@@ -1,0 +1,219 @@
+import { describe, expect, it } from 'vitest';
+import { constructionDepth, CROSSFALL, sizeableForms, type AppraisedOption } from '../../lib/index.ts';
+import { exampleNames, type ExampleName } from '../../notebooks/examples.ts';
+import { crossing } from '../../notebooks/drawing/crossing.ts';
+import { deckStrips } from '../../notebooks/drawing/deckStrips.ts';
+import { elevation, wantsWidth } from '../../notebooks/drawing/elevation.ts';
+import type { Piece } from '../../notebooks/drawing/piece.ts';
+import { plan } from '../../notebooks/drawing/plan.ts';
+import { section } from '../../notebooks/drawing/section.ts';
+import { mainDesign } from '../../notebooks/drawing/sectionRow.ts';
+import { toSvgFile } from '../../notebooks/drawing/toText.ts';
+import { expectGolden } from './golden.ts';
+import { crossedBy, example, type Crossed } from './measuring/crossings.ts';
+import { measureElevation } from './measuring/elevationMarks.ts';
+import { chainagesOf, measureOption, near, READING_PX, spareWorkedOut } from './measuring/measureOption.ts';
+import { measureUnits } from './measuring/measureUnits.ts';
+import { levelMarksOf, readPaper } from './measuring/paper.ts';
+import { stripsDrawn } from './measuring/sectionMarks.ts';
+import { having, printed, readSvg, within, type Node } from './measuring/svg.ts';
+
+const file = (piece: Piece): Node => readSvg(toSvgFile(piece));
+const wordsOf = (svg: Node): string[] =>
+  [...within(svg)].filter(({ tag }) => tag === 'text').map(({ text }) => text);
+
+const elevationOf = ({ appraisal }: Crossed, option: AppraisedOption, widthPx = 980): Node =>
+  file(elevation({ site: appraisal.site, option, widthPx }));
+
+/** The crossing as it stands at the head of a study. */
+const crossingOf = ({ appraisal, study }: Crossed, option: AppraisedOption): Node =>
+  file(crossing({ site: appraisal.site, option, obstacles: study.brief.obstacles, widthPx: 1224 }));
+
+describe('elevation(input), measured', { timeout: 120_000 }, () => {
+  it.each(exampleNames)('gives back spans, depths, road and founding of every option of %s', (name) => {
+    const crossed = example(name);
+    expect(crossed.appraisal.options.length).toBeGreaterThan(0);
+    for (const option of crossed.appraisal.options)
+      measureOption(elevationOf(crossed, option), crossed.appraisal.site, option);
+  });
+
+  it.each(sizeableForms)('gives back those of a %s', (form) => {
+    const crossed = crossedBy(form);
+    const option = crossed.appraisal.options.find(({ units }) => units.some((unit) => unit.form === form));
+    expect(option, `${crossed.name}: ${JSON.stringify(crossed.appraisal.dropped)}`).toBeDefined();
+    // Wide enough for the line of the soffit and for foundations.
+    const widthPx = 980 * Math.max(1, Math.ceil(crossed.appraisal.site.lengthM / 240));
+    measureOption(elevationOf(crossed, option!, widthPx), crossed.appraisal.site, option!);
+  });
+});
+
+describe('crossing(input), measured', { timeout: 120_000 }, () => {
+  it.each(exampleNames)('gives back what every option of %s is, and prints its spans', (name) => {
+    const crossed = example(name);
+    for (const option of crossed.appraisal.options) {
+      const svg = crossingOf(crossed, option);
+      measureOption(svg, crossed.appraisal.site, option);
+      const paper = readPaper(svg);
+      const words = wordsOf(svg);
+      const at = chainagesOf(option);
+      if (paper.scale < 2000)
+        for (const [i, x] of at.slice(1).entries()) expect(words).toContain((x - at[i]!).toFixed(1));
+    }
+  });
+
+  it.each(exampleNames)('stands every level mark of %s at the level it states', (name) => {
+    const crossed = example(name);
+    const svg = crossingOf(crossed, crossed.appraisal.options[0]!);
+    const paper = readPaper(svg);
+    for (const { words, y } of levelMarksOf(svg)) {
+      // Levels are printed to the centimetre.
+      const off = Math.abs(paper.levelM(y) - printed(words));
+      expect(off * paper.pxPerM, words).toBeLessThanOrEqual(READING_PX + 0.005 * paper.pxPerM);
+    }
+  });
+
+  it.each(exampleNames)('leaves over each envelope of %s what the option has spare', (name) => {
+    const { appraisal, study } = example(name);
+    const { site } = appraisal;
+    // The soffit is drawn on the line of the road; at its edge the deck is lower by the fall of the carriageway.
+    const fallM = constructionDepth(site.deck, 0) - site.deck.surfacingM;
+    const spares: number[] = [];
+    for (const option of appraisal.options)
+      for (const obstacle of study.brief.obstacles) {
+        const { clearance } = obstacle;
+        if (clearance === null) continue;
+        const { fromM, toM, datumLevelM, headroomM } = clearance;
+        const window = { fromM: fromM - 20, toM: toM + 20 };
+        const svg = file(
+          crossing({ site, option, obstacles: [obstacle], widthPx: 980, scale: 500, window, band: false }),
+        );
+        const paper = readPaper(svg);
+        const marks = measureElevation(svg);
+        const [drawn] = marks.envelopes;
+        const where = `option ${String(option.number)} over ${obstacle.name}`;
+        expect(marks.envelopes, where).toHaveLength(1);
+        near(paper, `${where}, foot`, paper.levelM(drawn!.bottom), datumLevelM);
+        near(paper, `${where}, top`, paper.levelM(drawn!.top), datumLevelM + headroomM);
+        near(paper, `${where}, width`, (drawn!.right - drawn!.left) / paper.pxPerM, toM - fromM);
+        const steps = 400;
+        const gaps = Array.from({ length: steps + 1 }, (_, i) => {
+          const x = drawn!.left + ((drawn!.right - drawn!.left) * i) / steps;
+          return (drawn!.top - marks.soffitAt(x)) / paper.pxPerM - fallM;
+        });
+        const measured = Math.min(...gaps);
+        near(
+          paper,
+          `${where}, spare`,
+          measured,
+          spareWorkedOut(site, option, fromM, toM, datumLevelM + headroomM),
+        );
+        if (option.headroom !== null && option.headroom.reason.includes('over'))
+          spares.push(option.headroom.spareM - measured);
+      }
+    // What decides an option is never more than what is left over one of its envelopes.
+    for (const spare of spares) expect(spare).toBeLessThan(0.02);
+  });
+
+  it.each(exampleNames)(
+    'bands the chainages of %s where they lie, with the levels that are drawn there',
+    (name) => {
+      const crossed = example(name);
+      const { site, options } = crossed.appraisal;
+      const svg = file(
+        crossing({ site, option: options[0]!, obstacles: crossed.study.brief.obstacles, widthPx: 980 * 2 }),
+      );
+      const [band] = having(svg, 'class', 'band');
+      if (readPaper(svg).scale > 2000) return;
+      const paper = readPaper(svg);
+      const marks = measureElevation(svg);
+      const rows = band!.children.filter(({ tag }) => tag === 'g').slice(1);
+      const figures = new Map(
+        rows.map((row) => {
+          const [head, ...others] = row.children.filter(({ tag }) => tag === 'text');
+          return [
+            head!.text,
+            others.map(({ attrs, text }) => ({ x: Number(attrs['x']), value: printed(text) })),
+          ];
+        }),
+      );
+      const chainages = figures.get('ch')!;
+      const start = chainagesOf(options[0]!)[0]!;
+      chainages.forEach(({ x, value }, i) => {
+        // Chainages are printed to the decimetre, levels to the centimetre.
+        near(
+          paper,
+          `ch ${String(value)}`,
+          (x - marks.supports[0]!.x) / paper.pxPerM,
+          value - start,
+          READING_PX + 0.05 * paper.pxPerM,
+        );
+        const level = (row: string): number => figures.get(row)![i]!.value;
+        const px = READING_PX + 0.005 * paper.pxPerM;
+        near(paper, `ground at ${String(value)}`, paper.levelM(marks.groundAt(x)), level('ground'), px);
+        if (value >= start && value <= site.endM)
+          near(paper, `road at ${String(value)}`, paper.levelM(marks.roadAt(x)), level('road'), px);
+      });
+    },
+  );
+});
+
+describe('section(input), measured', { timeout: 120_000 }, () => {
+  it.each(exampleNames)('gives back deck, carriageway and depth of every unit of %s', (name) => {
+    for (const option of example(name).appraisal.options) measureUnits(option, () => true);
+  });
+
+  it.each(sizeableForms)('gives back those of a %s', (form) => {
+    const { appraisal } = crossedBy(form);
+    const option = appraisal.options.find(({ units }) => units.some((unit) => unit.form === form));
+    measureUnits(option!, (one) => one === form);
+  });
+});
+
+describe('deckStrips(input), measured', () => {
+  it.each(exampleNames)('gives back the strips of %s, each with its width', (name) => {
+    const { brief } = example(name).study;
+    const marginPx = 20;
+    const scale = 100;
+    const svg = readSvg(
+      toSvgFile(
+        deckStrips({
+          strips: brief.deck,
+          surfacingM: brief.surfacingM,
+          crossfall: CROSSFALL,
+          scale,
+          marginPx,
+        }),
+      ),
+    );
+    const pxPerM = 96 / 0.0254 / scale;
+    const drawn = stripsDrawn(svg);
+    expect(drawn.map(({ kind }) => kind)).toEqual(brief.deck.map(({ kind }) => kind));
+    let edge = marginPx;
+    drawn.forEach(({ left, right }, i) => {
+      expect(Math.abs(left - edge)).toBeLessThanOrEqual(READING_PX);
+      expect(Math.abs((right - left) / pxPerM - brief.deck[i]!.widthM) * pxPerM).toBeLessThanOrEqual(
+        READING_PX,
+      );
+      edge += brief.deck[i]!.widthM * pxPerM;
+    });
+  });
+});
+
+describe('golden drawings of the examples', { timeout: 120_000 }, () => {
+  const sheetsOf = (name: ExampleName): Record<string, () => Piece> => {
+    const { appraisal, study } = example(name);
+    const { site, options, standing } = appraisal;
+    const option = options.find(({ number }) => number === (study.options.reference ?? standing.leader))!;
+    const widthPx = wantsWidth(site) ? 1224 : 980;
+    return {
+      crossing: () => crossing({ site, option, obstacles: study.brief.obstacles, widthPx }),
+      plan: () => plan({ site, option, widthPx, bar: true }),
+      section: () => section({ design: mainDesign(option)!, widthPx: 580 }),
+    };
+  };
+  it.each(
+    exampleNames.flatMap((name) => ['crossing', 'plan', 'section'].map((what) => [name, what] as const)),
+  )('%s, %s of the reference, is as it was last accepted', (name, what) => {
+    expectGolden(`example-${name}-${what}`, sheetsOf(name)[what]!());
+  });
+});
