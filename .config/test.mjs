@@ -1,8 +1,9 @@
 // npm test: install when needed, types, lint, unit (layer rules among them) and published checks, browser; ends with a plain count.
-import { spawnSync } from 'node:child_process';
+import { spawn } from 'node:child_process';
 import { mkdirSync, readFileSync } from 'node:fs';
+import { availableParallelism } from 'node:os';
 import { resolve } from 'node:path';
-import { install, root, runTogether } from './install.mjs';
+import { fail, install, root, runTogether } from './install.mjs';
 
 install();
 const started = performance.now();
@@ -15,22 +16,37 @@ await runTogether([
   ['npx', 'vite', 'build', '--logLevel', 'warn'],
 ]);
 
-mkdirSync(resolve(root, '.cache'), { recursive: true });
-let passed = 0;
-let failed = 0;
-let broken = false;
-for (const project of ['unit', 'browser']) {
+/** Runs the tests of one project; what it says is held back until it has ended, so that two do not talk at once. */
+function runProject(project, ...flags) {
   const file = resolve(root, `.cache/${project}.json`);
-  const outcome = spawnSync(
-    'npx',
-    ['vitest', 'run', '--project', project, '--reporter=dot', '--reporter=json', `--outputFile.json=${file}`],
-    { cwd: root, stdio: 'inherit', env: { ...process.env, CHROMIUM: chromium, TZ: 'UTC' } },
-  );
-  const report = JSON.parse(readFileSync(file, 'utf8'));
-  passed += report.numPassedTests;
-  failed += report.numFailedTests;
-  if (outcome.status !== 0) broken = true;
+  const args = ['vitest', 'run', '--project', project, '--reporter=dot', '--reporter=json'];
+  return new Promise((ended) => {
+    const child = spawn('npx', [...args, `--outputFile.json=${file}`, ...flags], {
+      cwd: root,
+      env: { ...process.env, CHROMIUM: chromium, TZ: 'UTC' },
+    });
+    const said = [];
+    child.stdout.on('data', (data) => said.push(data));
+    child.stderr.on('data', (data) => said.push(data));
+    child.on('error', ({ message }) => fail(`vitest could not be started: ${message}`));
+    child.on('close', (code) => {
+      process.stdout.write(Buffer.concat(said));
+      const { numPassedTests: passed, numFailedTests: failed } = JSON.parse(readFileSync(file, 'utf8'));
+      ended({ passed, failed, broken: code !== 0 });
+    });
+  });
 }
+
+mkdirSync(resolve(root, '.cache'), { recursive: true });
+process.stdout.write('Unit and browser tests ...\n');
+// A browser test waits half its time, so it has one processor and what the others leave.
+const outcomes = await Promise.all([
+  runProject('unit', `--maxWorkers=${Math.max(1, availableParallelism() - 1)}`),
+  runProject('browser'),
+]);
+const passed = outcomes.reduce((sum, one) => sum + one.passed, 0);
+const failed = outcomes.reduce((sum, one) => sum + one.failed, 0);
+const broken = outcomes.some((one) => one.broken);
 process.stdout.write(`Tests took ${Math.round((performance.now() - started) / 1000)} s.\n`);
 process.stdout.write(`${passed} passed, ${failed} failed\n`);
 process.exit(broken || failed > 0 || passed === 0 ? 1 : 0);

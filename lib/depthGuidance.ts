@@ -50,18 +50,17 @@ export function depthGuidance(form: FormId, task: GuideTask): readonly DepthGuid
   for (const [name, value] of Object.entries({ spanM, widthM, lengthM }))
     if (!(value > 0)) throw new RangeError(`${name}: expected more than 0 m, received ${value} m`);
   const continuity = continuityOf(form, (lengthM - spanM) / 2 / spanM);
-  const usual = favouring(form, { continuity, method: 'crane' });
-  const special = methodIds.flatMap((method) =>
-    favouring(form, { continuity, method })
-      .filter((rule) => !usual.includes(rule))
-      .map((rule) => ({ rule, method })),
-  );
-  const all: readonly { readonly rule: Rule; readonly method?: MethodId }[] = [
+  const given = { continuity, method: 'crane', haunched: false };
+  const usual = favouring(form, given);
+  const besides = (other: Facts): Rule[] =>
+    favouring(form, { ...given, ...other }).filter((rule) => !usual.includes(rule));
+  const all: readonly { readonly rule: Rule; readonly method?: MethodId; readonly haunched?: true }[] = [
     ...usual.map((rule) => ({ rule })),
-    ...special,
+    ...besides({ haunched: true }).map((rule) => ({ rule, haunched: true as const })),
+    ...methodIds.flatMap((method) => besides({ method }).map((rule) => ({ rule, method }))),
   ];
   const varies = usual.some((rule) => bandIn(rule)?.id === 'midspanDepthRatio');
-  return all.flatMap(({ rule, method }) => {
+  return all.flatMap(({ rule, method, haunched }) => {
     const band = bandIn(rule);
     if (band === null) return [];
     const { label, ratioOf } = fact(band.id);
@@ -70,12 +69,13 @@ export function depthGuidance(form: FormId, task: GuideTask): readonly DepthGuid
     const base = ratioOf?.[1] === 'deckWidthM' ? widthM : spanM;
     return [
       {
-        what:
+        what: `${
           band.id !== 'depthRatio'
             ? label.replace(/ over .*$/u, '')
-            : varies
+            : varies || haunched
               ? 'depth at the support'
-              : 'depth',
+              : 'depth'
+        }${haunched ? ' of a haunched deck' : ''}`,
         of: ratioOf?.[1] === 'deckWidthM' ? ('deck width' as const) : ('span' as const),
         ratio: band.ratio,
         depthM: [band.ratio[0] * base, band.ratio[1] * base] as const,

@@ -31,6 +31,15 @@ describe('depthGuidance(form, {spanM, widthM, lengthM})', () => {
     expect(least(65)).toBe(0.04);
   });
 
+  it('composite I-girders may be haunched: bands of their own, after those of constant depth', () => {
+    const bands = depthGuidance('composite-i', { spanM: 60, lengthM: 150 });
+    expect(bands.map(({ what }) => what)).toEqual([
+      'depth',
+      'depth at the support of a haunched deck',
+      'midspan depth of a haunched deck',
+    ]);
+  });
+
   it('haunched boxes tell support and midspan apart, and say what access needs', () => {
     const bands = depthGuidance('cantilever-box', { spanM: 63 });
     expect(bands.map(({ what }) => what)).toEqual(['depth at the support', 'midspan depth']);

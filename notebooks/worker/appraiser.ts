@@ -1,5 +1,5 @@
 import { conclude, formsAsked, optionsOf } from '../../lib/index.ts';
-import type { Appraisal, AppraisedOption, FormId, Option, Study } from '../../lib/index.ts';
+import type { Appraisal, AppraisedOption, Option, Study } from '../../lib/index.ts';
 import type { Progress, SlowRun } from '../reactive/index.ts';
 import { client, type Client } from './client.ts';
 import type { jobs } from './jobs.ts';
@@ -30,7 +30,7 @@ function progressOf(round: number, rounds: number, parts: readonly (Progress | u
 
 /**
  * Appraises with several workers: together they size the rows of the cost tables, then each searches its share of the
- * forms and works out its share of the options. A form keeps its worker, which remembers its designs.
+ * forms and works out its share of the options. An option keeps its worker, which remembers its designs.
  * The result is that of `appraise`, whoever did what.
  */
 export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser['appraise'] {
@@ -38,8 +38,6 @@ export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser
 
   return async (study, { signal, report } = {}) => {
     const forms = formsAsked(study);
-    /** A form stays with its worker, whose code for it has run and is fast. Forms that nobody asked for go to the first. */
-    const workerOf = (form: FormId): number => Math.max(0, forms.indexOf(form)) % of;
     /** One round: every worker does its part; the first failure gives up the others. */
     const round = async <T>(
       number: number,
@@ -68,14 +66,14 @@ export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser
       worker.call('lay', { study, share: { share, of } }, run),
     );
     const found = await round(1, (worker, share, run) =>
-      worker.call('propose', { study, forms: forms.filter((form) => workerOf(form) === share), rows }, run),
+      worker.call('propose', { study, forms: forms.filter((_, i) => i % of === share), rows }, run),
     );
     found.sort((a, b) => forms.indexOf(a.form) - forms.indexOf(b.form));
     const registered = optionsOf(study, found);
     const outcomes = await round(2, (worker, share, run) =>
       worker.call(
         'workOut',
-        { study, options: registered.options.filter(({ form }) => workerOf(form) === share) },
+        { study, options: registered.options.filter(({ number }) => number % of === share) },
         run,
       ),
     );
@@ -100,7 +98,11 @@ export function appraiser(): Appraiser {
   return {
     appraise: appraiseWith(started.map(({ line }) => line)),
     async workOut(study, options, run) {
-      const outcomes = await started[0]!.line.call('workOut', { study, options }, run);
+      const shares = started.map(({ line }, share) =>
+        line.call('workOut', { study, options: options.filter((_, i) => i % started.length === share) }, run),
+      );
+      const done = await Promise.all(shares);
+      const outcomes = options.map((_, i) => done[i % started.length]![Math.floor(i / started.length)]!);
       return outcomes.flatMap((outcome) => ('totals' in outcome ? [outcome.option] : []));
     },
     end() {
