@@ -118,7 +118,7 @@ export function optionFacts(
     ...arrangementFacts(site, option),
     ...supportFacts(site, option),
     ...riverFacts(site, option),
-    ...methodFacts(site, option, access),
+    ...methodFacts(site, option, study.brief),
     falseworkHeightM: option.method === 'falsework' ? falseworkHeightM(site, option, main) : 0,
     haunched: design.depthM.support !== design.depthM.midspan,
     prestressed: quantitiesOf(design.lines).prestressKg > 0,

@@ -1,6 +1,9 @@
-import type { Access, Facts, Site, Unit, WorkedOption } from '../model/index.ts';
+import type { Brief, DeckStrip, Design, Facts, Site, Unit, WorkedOption } from '../model/index.ts';
 import { headroomSpare } from '../site/index.ts';
-import { depthAlong, mainUnit } from './workOption.ts';
+import { erectionData } from './erectionData.ts';
+import { launchYardNeeded } from './launchYardNeeded.ts';
+import { pickRadius } from './pickRadius.ts';
+import { depthAlong, mainUnit, spansOf } from './workOption.ts';
 
 type Known = Record<string, Facts[string]>;
 
@@ -20,8 +23,61 @@ export function crossedFacts(site: Site, units: readonly Unit[], method: string)
   };
 }
 
-/** What can be brought to the site, and the headroom over roads and railways under the main unit of a worked option. */
-export function methodFacts(site: Site, option: WorkedOption, access: Access): Known {
+/** What the deck is of, as far as a launch goes. */
+const launchedOf = ({ task: { form } }: Design): 'steel' | 'concrete' =>
+  form === 'concrete-box' ? 'concrete' : 'steel';
+
+/** Load moment of the worst pick, tm, over the share of its chart that a crane is used to. */
+export const pickMoment = (massT: number, radiusM: number): number =>
+  (massT * radiusM) / erectionData.crane.chartShare;
+
+/** Half a deck that carries lanes between two barriers, m. */
+export function halfDeckNeeded(lanes: number): number {
+  const { laneM, barrierM } = erectionData.halves;
+  return lanes * laneM + 2 * barrierM;
+}
+
+/** Ultimate width of a deck less its width now, m. */
+export const widening = (deck: readonly DeckStrip[]): number =>
+  deck.reduce((sum, { widthM, ultimateWidthM }) => sum + Math.max(0, ultimateWidthM - widthM), 0);
+
+/** Plant and place: what the method needs beside the bridge against what the brief says there is. */
+function plantFacts(site: Site, { method, units, designs }: WorkedOption, { access }: Brief): Known {
+  const main = mainUnit(units);
+  const pieces = designs.map(({ heaviestPiece }) => heaviestPiece?.massT ?? 0);
+  const radii = units.map((unit) => pickRadius(site, unit));
+  const worst = units.reduce(
+    (most, _, u) => (pieces[u]! * radii[u]! > pieces[most]! * radii[most]! ? u : most),
+    0,
+  );
+  return {
+    unitSpans: spansOf(main).length,
+    launchYardM: access.launchYardM,
+    launchYardNeededM:
+      method === 'launch' ? launchYardNeeded(spansOf(main), launchedOf(designs[units.indexOf(main)]!)) : 0,
+    craneMomentKnown: access.craneMomentTm !== 'unknown',
+    craneMomentTm: access.craneMomentTm,
+    pickRadiusM: radii[worst]!,
+    pickMomentTm: pickMoment(pieces[worst]!, radii[worst]!),
+  };
+}
+
+/** What else the bridge is asked for: traffic beside the works, a gas main, a wider deck one day. */
+function demandFacts(site: Site, { units, designs }: WorkedOption, { demands, deck }: Brief): Known {
+  const { figures } = designs[units.indexOf(mainUnit(units))]!;
+  const lines = figures['girders'] ?? figures['beamLines'] ?? figures['boxes'];
+  return {
+    lanesKept: demands.lanesKept,
+    gasMain: demands.gasMain,
+    halfDeckM: site.deck.widthM / 2,
+    halfDeckNeededM: halfDeckNeeded(demands.lanesKept),
+    wideningM: widening(deck),
+    ...(lines === undefined ? {} : { girderLines: lines }),
+  };
+}
+
+/** What can be brought to the site and what stands beside it, and the headroom over roads and railways under the main unit of a worked option. */
+export function methodFacts(site: Site, option: WorkedOption, brief: Brief): Known {
   const limits = site.soffitLimits.filter(
     (limit) => (limit.kind === 'road' || limit.kind === 'railway') && crosses(mainUnit(option.units))(limit),
   );
@@ -31,8 +87,10 @@ export function methodFacts(site: Site, option: WorkedOption, access: Access): K
     depthAlong(site, option.units, option.designs),
   );
   return {
-    craneOnSite: access.crane,
-    bargeOnSite: access.barge,
+    craneOnSite: brief.access.crane,
+    bargeOnSite: brief.access.barge,
+    ...plantFacts(site, option, brief),
+    ...demandFacts(site, option, brief),
     ...(spare ? { trafficSpareM: spare.spareM } : {}),
   };
 }

@@ -3,6 +3,7 @@ import cableStayed from '../../data/forms/cable-stayed.json';
 import compositeBox from '../../data/forms/composite-box.json';
 import compositeI from '../../data/forms/composite-i.json';
 import concreteBox from '../../data/forms/concrete-box.json';
+import erection from '../../data/erection.json';
 import fatigue from '../../data/forms/fatigue.json';
 import floor from '../../data/forms/floor.json';
 import plates from '../../data/forms/plates.json';
@@ -34,6 +35,7 @@ const files: Readonly<Record<string, unknown>> = {
   river,
   road,
   programme,
+  erection,
   drivers,
   ground,
   materials,

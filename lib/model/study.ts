@@ -34,6 +34,7 @@ export interface Brief {
   readonly waters: readonly Water[];
   readonly groundStretches: readonly GroundStretch[];
   readonly access: Access;
+  readonly demands: Demands;
   readonly budget: Budget | Unknown;
 }
 
@@ -89,6 +90,17 @@ export interface Road {
   /** Whether the fill of the approaches runs out in side slopes or stands between retaining walls. */
   readonly approachSides: ApproachSides;
 }
+
+/** What else the bridge is asked for. */
+export interface Demands {
+  /** Traffic lanes that stay in use on an existing bridge on the same line, so that the new one is built in halves; 0 = none. */
+  readonly lanesKept: number;
+  /** A gas main on the deck: none, hung outside, or to be hidden inside. */
+  readonly gasMain: GasMain;
+}
+
+export const gasMains = ['none', 'outside', 'inside'] as const;
+export type GasMain = (typeof gasMains)[number];
 
 export const tieIns = ['moves', 'fixed'] as const;
 export type TieIn = (typeof tieIns)[number];
@@ -180,6 +192,10 @@ export interface Access {
   readonly haulMassT: number | Unknown;
   readonly crane: boolean | Unknown;
   readonly barge: boolean | Unknown;
+  /** Load moment by its chart of the largest crane that can stand on site, tm. */
+  readonly craneMomentTm: number | Unknown;
+  /** Level ground in line with the deck behind an abutment, from which it could be launched, m; 0 = none. */
+  readonly launchYardM: number | Unknown;
 }
 
 export interface Budget {

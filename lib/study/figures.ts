@@ -154,6 +154,10 @@ export const studyFigures: readonly Descriptor[] = [
   typed('brief/access/haulMassT', 'heaviest piece that reaches the site', 't'),
   typed('brief/access/crane', 'cranes can stand on site'),
   typed('brief/access/barge', 'barges can be used'),
+  typed('brief/access/craneMomentTm', 'load moment of the largest crane that can stand on site', 'tm'),
+  typed('brief/access/launchYardM', 'level ground in line behind an abutment', 'm'),
+  typed('brief/demands/lanesKept', 'lanes kept in use beside the works', 'no', typedOrPreset),
+  typed('brief/demands/gasMain', 'gas main on the deck', '', typedOrPreset),
   typed('brief/budget', 'budget'),
   described({
     path: 'brief/budget/amount',

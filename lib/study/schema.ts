@@ -2,6 +2,7 @@ import { z } from 'zod';
 import {
   approachSidesKinds,
   formIds,
+  gasMains,
   groundClassIds,
   methodIds,
   obstacleKinds,
@@ -128,6 +129,13 @@ const access = z.strictObject({
   haulMassT: orUnknown(z.number().positive().max(1e5)).default('unknown'),
   crane: orUnknown(z.boolean()).default('unknown'),
   barge: orUnknown(z.boolean()).default('unknown'),
+  craneMomentTm: orUnknown(z.number().positive().max(1e6)).default('unknown'),
+  launchYardM: orUnknown(z.number().min(0).max(10_000)).default('unknown'),
+});
+
+const demands = z.strictObject({
+  lanesKept: z.int().min(0).max(8).default(0),
+  gasMain: z.enum(gasMains).default('none'),
 });
 
 const budget = z.strictObject({ amount: money, priceDate: name, includes: text.default('') });
@@ -143,6 +151,7 @@ const brief = z
     waters: z.array(water).max(100).default([]),
     groundStretches: orUnknown(z.array(groundStretch).min(1).max(1000)).default('unknown'),
     access: access.prefault({}),
+    demands: demands.prefault({}),
     budget: orUnknown(budget).default('unknown'),
   })
   .transform((given) => ({ ...given, groundStretches: fillGround(given.groundStretches, given.crossing) }));

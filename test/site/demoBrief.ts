@@ -54,7 +54,15 @@ export function plainBrief(change: Partial<Brief> = {}): Brief {
     groundStretches: [
       { fromM: 0, toM: 100, known: true, classes: [{ ground: 'rock', bearingLevelM: -1, odds: 1 }] },
     ],
-    access: { haulLengthM: 'unknown', haulMassT: 'unknown', crane: 'unknown', barge: 'unknown' },
+    access: {
+      haulLengthM: 'unknown',
+      haulMassT: 'unknown',
+      crane: 'unknown',
+      barge: 'unknown',
+      craneMomentTm: 'unknown',
+      launchYardM: 'unknown',
+    },
+    demands: { lanesKept: 0, gasMain: 'none' },
     budget: 'unknown',
     ...change,
   };

@@ -68,7 +68,10 @@ describe('readStudy', () => {
       haulMassT: 'unknown',
       crane: 'unknown',
       barge: 'unknown',
+      craneMomentTm: 'unknown',
+      launchYardM: 'unknown',
     });
+    expect(study.brief.demands).toEqual({ lanesKept: 0, gasMain: 'none' });
     expect(study.brief.budget).toBe('unknown');
     expect(study.brief.road.fixedEnd).toBe('both');
     expect(study.brief.groundStretches).toHaveLength(1);

@@ -1,4 +1,4 @@
-import type { Access, Obstacle, Road, StandardId } from '../../../lib/index.ts';
+import type { Access, Demands, Obstacle, Road, StandardId } from '../../../lib/index.ts';
 import type { Choice } from '../../page/index.ts';
 
 /** Words of the choices in the brief. */
@@ -37,6 +37,22 @@ export const approachSideChoices: readonly Choice<Road['approachSides']>[] = [
 export const loadingChoices: readonly Choice<StandardId>[] = [
   { value: 'lm1', words: 'EN 1991-2, LM1' },
   { value: 'hl93', words: 'AASHTO HL-93' },
+];
+
+export const gasMainChoices: readonly Choice<Demands['gasMain']>[] = [
+  { value: 'none', words: 'no gas main' },
+  { value: 'outside', words: 'a gas main outside' },
+  { value: 'inside', words: 'a gas main hidden inside' },
+];
+
+/** Lanes kept in use while the bridge is built, as many as a study may have. */
+export const lanesKeptChoices: readonly Choice<string>[] = [
+  { value: '0', words: 'no lane stays' },
+  { value: '1', words: 'one lane stays' },
+  ...['two', 'three', 'four', 'five', 'six', 'seven', 'eight'].map((count, i) => ({
+    value: String(i + 2),
+    words: `${count} lanes stay`,
+  })),
 ];
 
 /** Yes, no, or not known, as a choice. */

@@ -5,7 +5,7 @@ import type { Graph } from '../../reactive/index.ts';
 import { envelopeSentence, lineSentence, supportsSentence } from './crossingSentences.ts';
 import { inWords } from './inWords.ts';
 import { budgetAmount, planShapeOf, provedOf } from './madeFields.ts';
-import { accessSentence, budgetSentence, groundSentence } from './meansSentences.ts';
+import { accessSentence, budgetSentence, demandsSentence, groundSentence } from './meansSentences.ts';
 import { problemBeside } from './problemBeside.ts';
 import { approachSentence, roadSentence, roadShape, waterSentence } from './roadSentences.ts';
 
@@ -71,7 +71,12 @@ export function briefSentences(graph: Graph, store: StudyStore): HTMLElement {
           roadSentence(words, study),
           approachSentence(words, study),
         ],
-        [groundSentence(words, study), accessSentence(words), budgetSentence(words, study, amount)],
+        [
+          groundSentence(words, study),
+          accessSentence(words),
+          demandsSentence(words),
+          budgetSentence(words, study, amount),
+        ],
       ];
       return h(
         'div',

@@ -1,7 +1,7 @@
 import type { Study } from '../../../lib/index.ts';
 import type { HtmlChild } from '../../html.ts';
 import { putAt, type Figure, type Made, type Path } from '../../page/index.ts';
-import { fromYesNo, yesNoOf, type YesNo } from './briefChoices.ts';
+import { fromYesNo, gasMainChoices, lanesKeptChoices, yesNoOf, type YesNo } from './briefChoices.ts';
 import type { InWords } from './inWords.ts';
 import { groundProved, provedOf } from './madeFields.ts';
 
@@ -63,7 +63,40 @@ export function accessSentence(words: InWords): HtmlChild {
     yesNo(words, 'crane'),
     ' stand beside the bridge, a barge ',
     yesNo(words, 'barge'),
-    ' come to it. ',
+    ' come to it. The largest crane there has a load moment of ',
+    limit('craneMomentTm', 'load moment of the largest crane', 'tm', 1000, 1e6),
+    ' tm; level ground in line behind an abutment is ',
+    fields.figure(['brief', 'access', 'launchYardM'], {
+      label: 'level ground behind an abutment',
+      places: 0,
+      unit: 'm',
+      unknown: 'an unknown number of',
+      from: 60,
+      min: { value: 0 },
+      max: { value: 10_000 },
+    }),
+    ' m long. ',
+  ];
+}
+
+const lanesPath: Path = ['brief', 'demands', 'lanesKept'];
+
+/** What else the bridge is asked for: a gas main, traffic beside the works. */
+export function demandsSentence({ fields }: InWords): HtmlChild {
+  return [
+    'It carries ',
+    fields.choice(['brief', 'demands', 'gasMain'], { label: 'gas main', choices: gasMainChoices }),
+    '; ',
+    fields.choice<string>(
+      {
+        key: lanesPath.join('.'),
+        get: ({ brief }) => String(brief.demands.lanesKept),
+        put: (study, lanes) => putAt(study, lanesPath, Number(lanes)),
+        owns: [lanesPath],
+      },
+      { label: 'lanes kept in use', choices: lanesKeptChoices },
+    ),
+    ' in use on a bridge on the same line while it is built. ',
   ];
 }
 
