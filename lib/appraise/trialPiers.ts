@@ -24,7 +24,7 @@ const STRAIGHT_M = 0.3;
 
 /** Everything but levels that a pier meets: two places alike in this differ by their ground and water depth alone. */
 function likeness(site: Site, chainageM: number): string {
-  const { waterDepthM, waterLevelM, floodDepthM, impact } = settingAt(site, chainageM);
+  const { waterDepthM, waterLevelM, floodDepthM, impact, soft } = settingAt(site, chainageM);
   return [
     stretchAt(site, chainageM),
     waterDepthM > 0,
@@ -32,6 +32,7 @@ function likeness(site: Site, chainageM: number): string {
     floodDepthM > 0,
     impact?.forceKN,
     impact?.heightM,
+    ...soft.map(({ name, fromM }) => `${name} ${fromM}`),
   ].join();
 }
 

@@ -43,7 +43,7 @@ export function arrange(request: ArrangeRequest, site: Site, table: CostTable): 
   const dropped = counter();
   const frame = frameFor(request, site, table);
   const candidates = candidatesOf(request, frame, table, dropped);
-  const polished = select(candidates, request.keep ?? KEPT, frame, site, table, dropped)
+  const polished = select(candidates, request.keep ?? KEPT, frame, table, dropped)
     .map((best) => polish(best, request, frame, site, table))
     .sort((a, b) => a.cost - b.cost);
   // An anchor pier may have made two of them the same kind.

@@ -1,4 +1,4 @@
-import type { CostTable, FormId, Site, Unit } from '../model/index.ts';
+import type { CostTable, FormId, Unit } from '../model/index.ts';
 import { chainageOf, type Frame } from './frame.ts';
 import { tableCost } from './tableCost.ts';
 
@@ -50,7 +50,7 @@ export function unitsOf(frame: Frame, placed: readonly PlacedUnit[]): Unit[] {
 }
 
 /** Works out what a row of placed units costs. */
-export function workOut(frame: Frame, site: Site, table: CostTable, placed: readonly PlacedUnit[]): Worked {
+export function workOut(frame: Frame, table: CostTable, placed: readonly PlacedUnit[]): Worked {
   const units = unitsOf(frame, placed);
-  return { placed, units, cost: tableCost(units, site, table) };
+  return { placed, units, cost: tableCost(units, table) };
 }

@@ -1,12 +1,6 @@
 import type { CostTable, FormId, Unit } from '../model/index.ts';
 import { chainageOf, type Frame } from './frame.ts';
 
-/**
- * A support in a soft zone costs this much more in the search, so that it is chosen only where it saves more than that.
- * Common practice, no source: access, protection and consents of a place better left alone.
- */
-export const SOFT_ZONE_EXTRA = 0.25;
-
 /** Even spans are preferred among equals: weight of the square of a span against the cost of the deck. */
 const EVEN = 1e-7;
 
@@ -95,12 +89,9 @@ export function supportCosts(
 ): SupportCosts {
   const growth = Math.cbrt(Math.max(mostM / leastM, 1.01));
   const knots = [0, 1, 2, 3].map((k) => leastM * growth ** k);
-  const { X, soft } = frame;
+  const { X } = frame;
   const C = knots.map((span) =>
-    Float64Array.from(
-      X,
-      (x, i) => table.support(form, chainageOf(frame, x), span, span) * (1 + SOFT_ZONE_EXTRA * soft[i]!),
-    ),
+    Float64Array.from(X, (x) => table.support(form, chainageOf(frame, x), span, span)),
   );
   return { knots, C };
 }

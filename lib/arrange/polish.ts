@@ -52,7 +52,7 @@ export function polish(
   let best = start;
   const last = frame.X.length - 1;
   const attempt = (placed: readonly PlacedUnit[]): boolean => {
-    const candidate = workOut(frame, site, table, placed);
+    const candidate = workOut(frame, table, placed);
     if (!(candidate.cost < best.cost * (1 - 1e-9)) || faultsOf(candidate.units, request, site).length > 0)
       return false;
     best = candidate;

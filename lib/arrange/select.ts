@@ -1,4 +1,4 @@
-import type { CostTable, Site } from '../model/index.ts';
+import type { CostTable } from '../model/index.ts';
 import { kindOf, workOut, type Candidate, type Worked } from './candidate.ts';
 import type { Counter } from './counter.ts';
 import type { Frame } from './frame.ts';
@@ -25,10 +25,10 @@ interface Kind {
 }
 
 /** The best of one kind by its true cost; candidates come with rising estimates. */
-function bestOf(candidates: readonly Candidate[], frame: Frame, site: Site, table: CostTable): Kind {
+function bestOf(candidates: readonly Candidate[], frame: Frame, table: CostTable): Kind {
   const tried = candidates
     .slice(0, WORKED)
-    .map((best) => ({ best, worked: workOut(frame, site, table, best.placed) }));
+    .map((best) => ({ best, worked: workOut(frame, table, best.placed) }));
   return tried.reduce((a, b) => (b.worked.cost < a.worked.cost * (1 - 1e-9) ? b : a));
 }
 
@@ -40,7 +40,6 @@ export function select(
   candidates: readonly Candidate[],
   keep: number,
   frame: Frame,
-  site: Site,
   table: CostTable,
   dropped: Counter,
 ): Worked[] {
@@ -52,7 +51,7 @@ export function select(
     else same.push(candidate);
   }
   // Kinds come with rising estimates, so the cheapest few by true cost are among the first twice as many.
-  const best = [...kinds.values()].slice(0, 2 * keep).map((same) => bestOf(same, frame, site, table));
+  const best = [...kinds.values()].slice(0, 2 * keep).map((same) => bestOf(same, frame, table));
   const kept = best.sort((a, b) => a.worked.cost - b.worked.cost).slice(0, keep);
   const keptKinds = new Set(kept.map((kind) => kindOf(kind.best.placed)));
   for (const [kind, same] of kinds) {

@@ -1,6 +1,5 @@
-import type { CostTable, FormId, Site, Unit } from '../model/index.ts';
-import { endWorksAs, SOFT_ZONE_EXTRA, unevenCost } from './curves.ts';
-import { SAME_M } from './frame.ts';
+import type { CostTable, FormId, Unit } from '../model/index.ts';
+import { endWorksAs, unevenCost } from './curves.ts';
 
 /** A support between two spans, with the form that stands on it. */
 interface Standing {
@@ -8,12 +7,6 @@ interface Standing {
   readonly form: FormId;
   readonly leftM: number;
   readonly rightM: number;
-}
-
-function inSoftZone(site: Site, chainageM: number): boolean {
-  return site.zones.some(
-    ({ hard, fromM, toM }) => !hard && chainageM > fromM + SAME_M && chainageM < toM - SAME_M,
-  );
 }
 
 /** Intermediate supports of a row of units; one between two units belongs to the main unit. */
@@ -45,10 +38,10 @@ export function governingSpan(unit: Unit): number {
 /**
  * Cost of a row of units on the cost table, money: decks at the governing span of each unit, end spans of continuous
  * ones as the longer inner spans that they work like, fixed costs, and every
- * intermediate support, dearer by `SOFT_ZONE_EXTRA` in a soft zone. Abutments are the same for every arrangement and
+ * intermediate support, dearer in a soft zone where the table says so. Abutments are the same for every arrangement and
  * are left out. Uneven approach spans carry the preference of `unevenCost`. For ordering only.
  */
-export function tableCost(units: readonly Unit[], site: Site, table: CostTable): number {
+export function tableCost(units: readonly Unit[], table: CostTable): number {
   let cost = 0;
   for (const unit of units) {
     const governingM = governingSpan(unit);
@@ -64,8 +57,7 @@ export function tableCost(units: readonly Unit[], site: Site, table: CostTable):
     }
   }
   for (const { chainageM, form, leftM, rightM } of standings(units)) {
-    const extra = inSoftZone(site, chainageM) ? SOFT_ZONE_EXTRA : 0;
-    cost += table.support(form, chainageM, leftM, rightM) * (1 + extra);
+    cost += table.support(form, chainageM, leftM, rightM);
   }
   return cost;
 }

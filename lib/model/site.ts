@@ -32,6 +32,8 @@ export interface Zone {
   readonly hard: boolean;
   readonly kind: ObstacleKind;
   readonly name: string;
+  /** What an inner support in a soft one costs besides itself, money, where the brief says so; the rate of the pack elsewhere. */
+  readonly pierPremium?: number;
 }
 
 /** Lowest soffit allowed along a stretch. */

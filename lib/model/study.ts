@@ -130,6 +130,11 @@ export interface Obstacle {
   readonly toM: number;
   /** `hard`: no support may stand here, ever. `soft`: one may, at a price or with a caution. `none`: free. */
   readonly supports: 'hard' | 'soft' | 'none';
+  /**
+   * What an inner support in a soft stretch costs besides itself (consents, protection, access), money of the study's
+   * currency; unknown: the rate of the pack. Not read where the stretch is not soft.
+   */
+  readonly pierPremium: number | Unknown;
   /** Envelope to be kept free above it, or null where there is none. */
   readonly clearance: Clearance | null;
 }

@@ -1,4 +1,4 @@
-import type { GroundStretch, Site, SoffitLimit } from '../model/index.ts';
+import type { GroundStretch, Site, SoffitLimit, Zone } from '../model/index.ts';
 
 /** Places closer than this are the same, m. */
 const SAME_M = 1e-6;
@@ -53,6 +53,13 @@ export function stretchAt(site: Site, chainageM: number): number {
     }
   });
   return nearest;
+}
+
+/** The soft stretches in which a chainage lies; its ends are outside. */
+export function softZonesAt(site: Pick<Site, 'zones'>, chainageM: number): readonly Zone[] {
+  return site.zones.filter(
+    ({ hard, fromM, toM }) => !hard && chainageM > fromM + SAME_M && chainageM < toM - SAME_M,
+  );
 }
 
 /** The highest of the lowest-soffit limits at a chainage, or null where nothing has to be kept clear. */

@@ -4,8 +4,9 @@ import { roadCurves } from './roadCurves.ts';
 
 function zoneOf(obstacle: Obstacle): Zone[] {
   if (obstacle.supports === 'none') return [];
-  const { fromM, toM, kind, name } = obstacle;
-  return [{ fromM, toM, kind, name, hard: obstacle.supports === 'hard' }];
+  const { fromM, toM, kind, name, pierPremium } = obstacle;
+  const hard = obstacle.supports === 'hard';
+  return [{ fromM, toM, kind, name, hard, ...(hard || pierPremium === 'unknown' ? {} : { pierPremium }) }];
 }
 
 function clearanceLimit(obstacle: Obstacle): SoffitLimit[] {

@@ -110,6 +110,10 @@ export const studyFigures: readonly Descriptor[] = [
   typed('brief/obstacles/:i/fromM', (at) => `start of ${obstacleOf(at)}`, 'm'),
   typed('brief/obstacles/:i/toM', (at) => `end of ${obstacleOf(at)}`, 'm'),
   typed('brief/obstacles/:i/supports', (at) => `supports in ${obstacleOf(at)}`),
+  typed(
+    'brief/obstacles/:i/pierPremium',
+    (at) => `sum for a support in ${obstacleOf(at)}, ${at.study.books.currency}`,
+  ),
   typed('brief/obstacles/:i/clearance/fromM', (at) => `start of the clearance over ${obstacleOf(at)}`, 'm'),
   typed('brief/obstacles/:i/clearance/toM', (at) => `end of the clearance over ${obstacleOf(at)}`, 'm'),
   typed('brief/obstacles/:i/clearance/datumLevelM', (at) => `level of ${obstacleOf(at)}`, 'm'),

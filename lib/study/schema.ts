@@ -83,6 +83,7 @@ const obstacle = z.strictObject({
   fromM: chainage,
   toM: chainage,
   supports: z.enum(['hard', 'soft', 'none']),
+  pierPremium: orUnknown(money).default('unknown'),
   clearance: clearance.nullable().default(null),
 });
 

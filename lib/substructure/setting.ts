@@ -1,6 +1,6 @@
-import type { Site } from '../model/index.ts';
+import type { Site, Zone } from '../model/index.ts';
 import { flowAt, scourAt, type FlowAt } from '../river/index.ts';
-import { groundAt, waterDepthAt } from '../site/index.ts';
+import { groundAt, softZonesAt, waterDepthAt } from '../site/index.ts';
 import { substructureData } from './data.ts';
 import { seismicLoad, type SeismicLoad } from './seismicLoad.ts';
 
@@ -21,6 +21,8 @@ export interface Setting {
   readonly vesselKN: number | null;
   /** Spectral and ground acceleration to design for, shares of gravity; null where none is known. */
   readonly seismic: SeismicLoad | null;
+  /** Stretches here in which supports had better not stand. */
+  readonly soft: readonly Zone[];
 }
 
 /**
@@ -49,6 +51,7 @@ export function settingAt(site: Site, chainageM: number): Setting {
     impact: impactNear(site, chainageM),
     vesselKN: vesselAt(site, chainageM),
     seismic: seismicLoad(site),
+    soft: softZonesAt(site, chainageM),
   };
 }
 

@@ -12,6 +12,7 @@ import {
   articulationOf,
   bearingLoadMN,
   shaftLines,
+  softZoneLines,
   waterAccessLines,
 } from './supportLines.ts';
 
@@ -89,6 +90,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
       ...articulationLines(ask, site.deck),
       ...shaftLines(ask, shaft, 'piers', 'pier-concrete', how),
       ...waterAccessLines(ask, setting.waterDepthM),
+      ...softZoneLines(ask, setting.soft),
     ],
     foundations: ground.classes.map((odds) => foundationFor(task, odds)),
   };

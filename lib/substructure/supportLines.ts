@@ -1,4 +1,12 @@
-import type { Articulation, BillPart, DeckSpec, MeasuredLine, PierShaft, Support } from '../model/index.ts';
+import type {
+  Articulation,
+  BillPart,
+  DeckSpec,
+  MeasuredLine,
+  PierShaft,
+  Support,
+  Zone,
+} from '../model/index.ts';
 import { bearingKind } from './bearingKind.ts';
 import { substructureData } from './data.ts';
 import type { SupportAsk } from './supportAsk.ts';
@@ -85,6 +93,17 @@ export function waterAccessLines(ask: SupportAsk, waterDepthM: number): Measured
   if (!(waterDepthM > 0)) return [];
   const how = `${waterDepthM.toFixed(1)} m of water`;
   return [line(ask, 'river-works', 'water-access', 1, `${ask.name} access over water`, how)];
+}
+
+/** What a support costs besides itself for each stretch it stands in where the brief would rather have none. */
+export function softZoneLines(ask: SupportAsk, soft: readonly Zone[]): MeasuredLine[] {
+  return soft.map(({ name, pierPremium }) => {
+    const what = `${ask.name} in ${name}`;
+    const how = 'consents, protection and access where supports had better not stand';
+    return pierPremium === undefined
+      ? line(ask, 'piers', 'soft-stretch-support', 1, what, `${how}; the brief names no sum`)
+      : line(ask, 'piers', 'soft-stretch-sum', pierPremium, what, `${how}; sum of the brief`);
+  });
 }
 
 /**

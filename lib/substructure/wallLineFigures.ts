@@ -26,6 +26,24 @@ const wings = (at: At) =>
     slope: 'site/road/fillSideSlope',
   }) as const;
 
+/** Where the brief says of the soft stretch that a line is measured for. */
+function softStretchOf(at: At): string {
+  const { obstacles } = at.study.brief;
+  const x = at.support.chainageM;
+  const index = obstacles.findIndex(
+    ({ supports, name, fromM, toM }) =>
+      supports === 'soft' && x > fromM && x < toM && lineOf(at).what.endsWith(` in ${name}`),
+  );
+  return `brief/obstacles/${index}`;
+}
+
+const softStretch = (at: At) =>
+  ({
+    support: `${at.foot}/chainageM`,
+    from: `${softStretchOf(at)}/fromM`,
+    to: `${softStretchOf(at)}/toM`,
+  }) as const;
+
 /** Measured lines of a support above its foundation, from its own figures. */
 export const wallLineFigures: readonly Descriptor[] = [
   described({
@@ -74,6 +92,26 @@ export const wallLineFigures: readonly Descriptor[] = [
     formula: 'one platform for a support in water',
     inputs: (at) => ({ water: `${at.foot}/waterDepthM` }),
     compute: ({ water }) => (water > 0 ? 1 : 0),
+  }),
+  described({
+    path,
+    when: is('soft-stretch-support'),
+    label,
+    unit: 'no',
+    method: 'count',
+    formula: 'once for each soft stretch a support stands in; the brief names no sum',
+    inputs: softStretch,
+    value: () => 1,
+  }),
+  described({
+    path,
+    when: is('soft-stretch-sum'),
+    label,
+    unit: 'money',
+    method: 'as given',
+    formula: 'sum of the brief',
+    inputs: (at) => ({ ...softStretch(at), sum: `${softStretchOf(at)}/pierPremium` }),
+    compute: ({ sum }) => sum,
   }),
   described({
     path,

@@ -72,6 +72,7 @@ describe('arrangementFacts(pier in a soft stretch)', () => {
     name: 'walled garden',
     fromM: 1400,
     toM: 1420,
+    pierPremium: 'unknown',
     clearance: null,
   } as const;
   const cautions = (supports: 'soft' | 'none', pierM: number): readonly string[] => {

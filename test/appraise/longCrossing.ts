@@ -10,7 +10,7 @@ const obstacle = (
   fromM: number,
   toM: number,
   supports: Obstacle['supports'],
-): Obstacle => ({ kind, name, fromM, toM, supports, clearance: null });
+): Obstacle => ({ kind, name, fromM, toM, supports, pierPremium: 'unknown', clearance: null });
 
 /**
  * An invented estuary of 3 km with twenty stretches in which supports may not or had better not stand: nineteen of 15 to

@@ -19,6 +19,7 @@ export function demoSite(
       fromM,
       toM,
       supports,
+      pierPremium: 'unknown',
       clearance: null,
     });
   const plain = plainBrief();

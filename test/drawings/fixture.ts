@@ -114,6 +114,7 @@ export const obstacles: readonly Obstacle[] = [
     fromM: 1266,
     toM: 1278,
     supports: 'hard',
+    pierPremium: 'unknown',
     clearance: { fromM: 1267.4, toM: 1276.6, datumLevelM: 11.2, headroomM: 5.9, confirmed: false },
   },
   {
@@ -122,6 +123,7 @@ export const obstacles: readonly Obstacle[] = [
     fromM: 1325,
     toM: 1385,
     supports: 'hard',
+    pierPremium: 'unknown',
     clearance: { fromM: 1345, toM: 1365, datumLevelM: 7.2, headroomM: 4.5, confirmed: true },
   },
 ];

@@ -56,7 +56,7 @@ export const otherwise = (): Context =>
     };
   });
 
-/** The same crossing with its river known and piers standing in it: flow and velocity, bed, afflux allowed, vessels, and an earthquake. */
+/** The same crossing with its river known and piers standing in it and on its banks: flow and velocity, bed, afflux allowed, vessels, and an earthquake. */
 export const inFlood = (): Context =>
   once('inFlood', () => {
     const study = lowFerry();
@@ -66,9 +66,23 @@ export const inFlood = (): Context =>
       brief: {
         ...brief,
         crossing: { ...brief.crossing, groundAccelerationG: 0.16, siteClass: 'C' },
-        obstacles: brief.obstacles.map((one) =>
-          one.kind === 'river' ? { ...one, supports: 'none', clearance: null } : one,
-        ),
+        obstacles: [
+          ...brief.obstacles.map((one) =>
+            one.kind === 'river' ? ({ ...one, supports: 'none', clearance: null } as const) : one,
+          ),
+          ...([60_000, 'unknown'] as const).map(
+            (pierPremium, i) =>
+              ({
+                kind: 'bank',
+                name: `bank ${i + 1}`,
+                fromM: [1278, 1436][i]!,
+                toM: [1284, 1442][i]!,
+                supports: 'soft',
+                pierPremium,
+                clearance: null,
+              }) as const,
+          ),
+        ],
         waters: brief.waters.map((water) => ({
           ...water,
           flowM3s: 420,
@@ -127,6 +141,7 @@ export const frame = (): Context =>
             fromM: 107,
             toM: 117,
             supports: 'hard',
+            pierPremium: 'unknown',
             clearance: { fromM: 108, toM: 116, datumLevelM: 10.1, headroomM: 5, confirmed: true },
           },
         ],

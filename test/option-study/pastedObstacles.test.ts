@@ -21,9 +21,18 @@ describe('pastedObstacles(text)', () => {
           fromM: 1300.5,
           toM: 1320,
           supports: 'hard',
+          pierPremium: 'unknown',
           clearance: { fromM: 1302, toM: 1318, datumLevelM: 7.2, headroomM: 4.5, confirmed: false },
         },
-        { kind: 'road', name: 'Farm track', fromM: 1350, toM: 1354, supports: 'none', clearance: null },
+        {
+          kind: 'road',
+          name: 'Farm track',
+          fromM: 1350,
+          toM: 1354,
+          supports: 'none',
+          pierPremium: 'unknown',
+          clearance: null,
+        },
       ],
     });
   });

@@ -49,6 +49,7 @@ const trials: fc.Arbitrary<Trial> = fc
         fromM,
         toM,
         supports: 'none',
+        pierPremium: 'unknown',
         clearance: {
           fromM,
           toM,

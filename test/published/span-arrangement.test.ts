@@ -88,6 +88,7 @@ function studyOf({ lengthM, crossed }: Crossing): Study {
         fromM,
         toM,
         supports: 'hard',
+        pierPremium: 'unknown',
         clearance: null,
       })),
       waters: [],

@@ -14,7 +14,7 @@ import {
 import { lowFerry, plainBrief } from './demoBrief.ts';
 
 function obstacle(fromM: number, toM: number, clearance: Clearance | null = null): Obstacle {
-  return { kind: 'railway', name: 'line', fromM, toM, supports: 'hard', clearance };
+  return { kind: 'railway', name: 'line', fromM, toM, supports: 'hard', pierPremium: 'unknown', clearance };
 }
 
 function clear(fromM: number, toM: number, levelM: number): Clearance {

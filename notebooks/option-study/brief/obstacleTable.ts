@@ -20,6 +20,7 @@ export function newObstacle({ brief }: Study): Obstacle {
     fromM: middleM - 5,
     toM: middleM + 5,
     supports: 'none',
+    pierPremium: 'unknown',
     clearance: null,
   };
 }
@@ -46,7 +47,38 @@ function clearanceChoice(fields: Fields, index: number, name: string): HTMLEleme
   );
 }
 
-function row(fields: Fields, store: StudyStore, obstacle: Obstacle, index: number): HTMLElement[] {
+/** What a support in a soft stretch costs besides itself; nothing said takes the rate of the pack. */
+function premium(fields: Fields, index: number, name: string, currency: string): HTMLElement {
+  const at: Path = [...list, index, 'pierPremium'];
+  return fields.figure(
+    {
+      key: at.join('.'),
+      has: (study) => index < study.brief.obstacles.length,
+      get: (study) => study.brief.obstacles[index]!.pierPremium,
+      put: (study, sum) => putAt(study, at, sum),
+      owns: [at],
+    },
+    {
+      label: `${name}, sum for a support in it, thousand ${currency}`,
+      places: 0,
+      unit: `k${currency}`,
+      per: 1e-3,
+      step: 5,
+      unknown: 'by rate',
+      from: 90,
+      min: { value: 0, open: true },
+      max: { value: 1e9 },
+    },
+  );
+}
+
+function row(
+  fields: Fields,
+  store: StudyStore,
+  obstacle: Obstacle,
+  index: number,
+  currency: string,
+): HTMLElement[] {
   const at = (...rest: Path): Path => [...list, index, ...rest];
   const named = `obstacle ${index + 1}`;
   const metres = (what: string, places: number, ...rest: Path): HTMLElement =>
@@ -76,6 +108,7 @@ function row(fields: Fields, store: StudyStore, obstacle: Obstacle, index: numbe
     metres('from', 1, 'fromM'),
     metres('to', 1, 'toM'),
     fields.choice(at('supports'), { label: `${named}, supports`, choices: supportChoices }),
+    obstacle.supports === 'soft' ? premium(fields, index, named, currency) : '–',
     clearanceChoice(fields, index, named),
     ...(envelope ?? ['–', '–', '–', '–']),
     listAction('take out', `take out ${obstacle.name}`, `take.obstacles.${index}`, () =>
@@ -127,8 +160,9 @@ function pasting(store: StudyStore): { readonly box: HTMLElement; readonly take:
 export function obstacleTable(graph: Graph, store: StudyStore): HTMLElement {
   const { element } = standing(graph, store, {
     say: problemBeside,
-    shape: ({ brief }) => brief.obstacles.map(({ clearance }) => clearance !== null),
-    build: ({ brief }, fields) => [
+    shape: ({ brief }) =>
+      brief.obstacles.map(({ clearance, supports }) => `${clearance !== null} ${supports === 'soft'}`),
+    build: ({ brief, books }, fields) => [
       h(
         'div',
         { class: 'across' },
@@ -142,15 +176,26 @@ export function obstacleTable(graph: Graph, store: StudyStore): HTMLElement {
             h(
               'tr',
               {},
-              ['', '', 'from', 'to', 'supports', 'envelope', 'from', 'to', 'above level', 'clear', ''].map(
-                (words) => h('th', { scope: 'col' }, words),
-              ),
+              [
+                '',
+                '',
+                'from',
+                'to',
+                'supports',
+                'sum for one',
+                'envelope',
+                'from',
+                'to',
+                'above level',
+                'clear',
+                '',
+              ].map((words) => h('th', { scope: 'col' }, words)),
             ),
           ),
           h(
             'tbody',
             {},
-            brief.obstacles.map((obstacle, index) => row(fields, store, obstacle, index)),
+            brief.obstacles.map((obstacle, index) => row(fields, store, obstacle, index, books.currency)),
           ),
         ),
       ),

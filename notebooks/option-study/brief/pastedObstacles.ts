@@ -70,6 +70,7 @@ function readLine(line: string): Read<Obstacle> {
       fromM: fromM!,
       toM: toM!,
       supports: supports?.value ?? 'none',
+      pierPremium: 'unknown',
       clearance: hasEnvelope
         ? {
             fromM: clearFromM!,
