@@ -2,7 +2,7 @@ import type { CostTable, Site } from '../model/index.ts';
 import { kindOf, type Candidate } from './candidate.ts';
 import { continuousCandidates } from './continuous.ts';
 import { counter, type Counter } from './counter.ts';
-import { frameOf, type Frame } from './frame.ts';
+import { SAME_M, frameOf, type Frame } from './frame.ts';
 import { mainUnitCandidates } from './mainUnits.ts';
 import { polish } from './polish.ts';
 import { flatTable, relaxationsOf } from './relaxations.ts';
@@ -25,9 +25,15 @@ function frameFor(request: ArrangeRequest, site: Site, table: CostTable): Frame 
   return frameOf(site, request.pierHalfWidthM, request.form, table, request.windows.minSpanM);
 }
 
+/** Whether the longest span allowed reaches over every barred stretch: where it does not, nothing needs to be searched. */
+function reachesOver({ windows, approach }: ArrangeRequest, { barred, lengthM }: Frame): boolean {
+  const longestM = Math.max(windows.maxSpanM, approach?.maxSpanM ?? 0) + SAME_M;
+  return barred.every(({ fromM, toM }) => Math.min(toM, lengthM) - Math.max(fromM, 0) <= longestM);
+}
+
 function fits(request: ArrangeRequest, site: Site): boolean {
   const frame = frameFor(request, site, flatTable);
-  return candidatesOf(request, frame, flatTable, counter(), 1).length > 0;
+  return reachesOver(request, frame) && candidatesOf(request, frame, flatTable, counter(), 1).length > 0;
 }
 
 /**
