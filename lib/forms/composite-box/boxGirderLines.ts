@@ -63,6 +63,15 @@ export function boxGirderLines(model: BoxGirderModel, girder: SizedGirder, steel
       'welds and bolts',
       `${(100 * compositeData.weldsAndBoltsShare.value).toFixed(1)} % of the steel above`,
     ),
+    ...(steel.splicesKg > 0
+      ? [
+          kg(
+            steel.splicesKg,
+            'field splices',
+            'joints of the pieces, plates and bolts for the yield of plates and webs',
+          ),
+        ]
+      : []),
     measured('deck', 'paint', outsideM2, 'outside of the boxes', 'webs, soffit and top flanges'),
     measured(
       'deck',

@@ -1,5 +1,6 @@
 import { materials } from '../../actions/index.ts';
 import { compositeData } from '../composite-i/compositeData.ts';
+import { fieldSplicesKg } from '../composite-i/fieldSplices.ts';
 import type { GirderEffects } from '../composite-i/girderEffects.ts';
 import type { GirderModel } from '../composite-i/girderModel.ts';
 import type { PlateRun } from '../composite-i/plateRun.ts';
@@ -64,6 +65,7 @@ export function boxSteelOf(box: BoxGirderModel) {
     const studs = tubs.count * studsOnGirder(model, run, effects);
     const studsKg = studs * compositeData.studs.kgEach;
     const crossKg = framesKg + topBracingKg + diaphragmsKg;
+    const splicesKg = tubs.count * fieldSplicesKg(model, run);
     const weldsKg =
       compositeData.weldsAndBoltsShare.value * (plateKg + leanKg + crossKg + ribsKg + bearingStiffenersKg);
     return {
@@ -81,7 +83,8 @@ export function boxSteelOf(box: BoxGirderModel) {
       bearingStiffenersKg,
       studsKg,
       weldsKg,
-      totalKg: crossKg + ribsKg + bearingStiffenersKg + leanKg + studsKg + weldsKg,
+      splicesKg,
+      totalKg: crossKg + ribsKg + bearingStiffenersKg + leanKg + studsKg + weldsKg + splicesKg,
       crossGirderM: 0,
       crossName: 'frames',
       studs,

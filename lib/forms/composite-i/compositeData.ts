@@ -102,6 +102,23 @@ const schema = z.object({
     source,
   }),
   substringers: z.object({ fromSpanM: number, frameDepthOverGirder: number, strutShare: number, source }),
+  bracingMember: z.object({
+    slenderness: z.object({ lm1: number, hl93: number }),
+    gyrationOverLeg: number,
+    legOverThickness: number,
+    source,
+  }),
+  fieldSplice: z.object({
+    bolted: z.object({ lm1: z.boolean(), hl93: z.boolean() }),
+    boltKN: number,
+    boltKg: number,
+    pitchM: number,
+    gaugeM: number,
+    edgeM: number,
+    webPlateLeastM: number,
+    webColumns: number,
+    source,
+  }),
   stiffeners: z.object({
     widthBaseM: number,
     widthPerHeight: number,

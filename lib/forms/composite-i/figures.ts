@@ -16,6 +16,7 @@ const otherSteel = [
   'stiffeners',
   'shear studs',
   'welds and bolts',
+  'field splices',
 ] as const;
 const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/widthM` }) as const;
 
@@ -289,6 +290,19 @@ export const compositeFigures: readonly Descriptor[] = [
       steel: linesOf(at, ...plates, 'cross-girders', 'bracing', 'stiffeners'),
     }),
     compute: ({ share, steel }) => share * sum(steel),
+  }),
+  line('field splices', {
+    label: 'field splices',
+    unit: 'kg',
+    method: 'sizing',
+    formula:
+      'at each joint of the pieces plates on both faces of flanges and web with the bolts that carry their yield',
+    inputs: (at) => ({
+      plates: linesOf(at, ...plates),
+      girders: `${at.unit}/figures/girders`,
+      piece: 'data/composite-i/pieceLengthM',
+      bolt: 'data/composite-i/fieldSplice/boltKN',
+    }),
   }),
   ...compositeChecks,
   ...slabCheckFigures(manual, 'slabMeanM'),

@@ -4,6 +4,7 @@ import { barKg } from '../common/bars.ts';
 import { measured } from '../common/measured.ts';
 import { slabData } from '../common/slab/slabData.ts';
 import { compositeData } from './compositeData.ts';
+import { pieceJoints } from './fieldSplices.ts';
 import type { GirderModel } from './girderModel.ts';
 import { runsOf } from './plateRun.ts';
 import type { SizedGirder } from './sizeGirder.ts';
@@ -68,6 +69,15 @@ export function girderLines(model: GirderModel, girder: SizedGirder): MeasuredLi
       'welds and bolts',
       `${(compositeData.weldsAndBoltsShare.value * 100).toFixed(1)} % of the steel above`,
     ),
+    ...(secondary.splicesKg > 0
+      ? [
+          steel(
+            secondary.splicesKg,
+            'field splices',
+            `${pieceJoints(lengthM).length} joints in each girder, plates and bolts for the yield of flanges and web`,
+          ),
+        ]
+      : []),
     measured(
       'deck',
       'paint',

@@ -5,6 +5,8 @@ import type { GirderEffects } from './girderEffects.ts';
 import type { GirderModel } from './girderModel.ts';
 import { elementsPerSpan } from './elementsPerSpan.ts';
 import { platesAt, type PlateRun } from './plateRun.ts';
+import { strutKgPerM } from './bracingMember.ts';
+import { fieldSplicesKg } from './fieldSplices.ts';
 import { carryingFrameKg } from './substringers.ts';
 import { alongKg } from './webStiffener.ts';
 
@@ -16,6 +18,8 @@ export interface SecondarySteel {
   readonly bearingStiffenersKg: number;
   readonly studsKg: number;
   readonly weldsKg: number;
+  /** Plates and bolts of field splices; 0 where girders are welded on site. */
+  readonly splicesKg: number;
   readonly totalKg: number;
   /** Depth of the cross-girder as drawn, m; 0 for cross-frames. */
   readonly crossGirderM: number;
@@ -68,6 +72,7 @@ export function secondarySteel(
     : 0;
   const studs = layout.count * studsOnGirder(model, run, effects);
   const studsKg = studs * compositeData.studs.kgEach;
+  const splicesKg = layout.count * fieldSplicesKg(model, run);
   const weldsKg =
     compositeData.weldsAndBoltsShare.value * (plateKg + cross.kg + stiffenersKg + bearingStiffenersKg);
   return {
@@ -77,7 +82,8 @@ export function secondarySteel(
     bearingStiffenersKg,
     studsKg,
     weldsKg,
-    totalKg: cross.kg + substringersKg + stiffenersKg + bearingStiffenersKg + studsKg + weldsKg,
+    splicesKg,
+    totalKg: cross.kg + substringersKg + stiffenersKg + bearingStiffenersKg + studsKg + weldsKg + splicesKg,
     crossGirderM: cross.heightM,
     crossName: cross.name,
     studs,
@@ -142,15 +148,18 @@ function crossFrames(model: GirderModel, inner: number): Cross {
   const { crossFrame } = compositeData;
   const { spacingM, count } = model.layout;
   const deep = model.girderM > crossFrame.mostGirderForFrameM;
-  const lengthM = deep ? 2 * Math.hypot(spacingM, model.girderM) + 2 * spacingM : spacingM;
   const kgPerM = deep ? crossFrame.kgPerM : crossFrame.channelKgPerM;
   const perSupport = deep ? crossFrame.kgPerMAtSupports : crossFrame.channelKgPerM;
   const supports = model.supportsM.length;
-  const { substringers } = model;
-  const bay = (least: number): number =>
-    substringers
-      ? carryingFrameKg(substringers, spacingM, model.girderM, model.yieldMPa(0.03), least)
-      : lengthM * least;
+  const { substringers, standardId } = model;
+  const diagonalM = Math.hypot(spacingM, model.girderM);
+  // Diagonals that cross hold each other in the middle; chords are free from girder to girder.
+  const angle = (lengthM: number, least: number): number => Math.max(least, strutKgPerM(lengthM, standardId));
+  const bay = (least: number): number => {
+    if (substringers) return carryingFrameKg(substringers, model, least);
+    if (!deep) return spacingM * least;
+    return 2 * diagonalM * angle(diagonalM / 2, least) + 2 * spacingM * angle(spacingM, least);
+  };
   const kg = (count - 1) * (inner * bay(kgPerM) + supports * bay(perSupport));
   return { kg, heightM: 0, name: deep ? 'cross-frames of angles' : 'channels' };
 }

@@ -6,10 +6,11 @@ import {
   type CrossLine,
   type LoadStandard,
 } from '../../actions/index.ts';
-import type { UnitTask } from '../../model/index.ts';
+import type { StandardId, UnitTask } from '../../model/index.ts';
 import type { SlabDesign } from '../common/slab/designSlab.ts';
 import type { FloorBeam } from '../floor/floorBeam.ts';
 import { sizeStringer } from '../floor/sizeFloor.ts';
+import { strutKgPerM } from './bracingMember.ts';
 import { compositeData } from './compositeData.ts';
 import type { GirderLayout } from './girderLayout.ts';
 
@@ -59,24 +60,31 @@ export function substringers(
   };
 }
 
+/** What a cross-frame is laid out in. */
+export interface FrameBay {
+  readonly standardId: StandardId;
+  readonly layout: Pick<GirderLayout, 'spacingM'>;
+  readonly girderM: number;
+  readonly yieldMPa: (thicknessM: number) => number;
+}
+
 /**
  * Mass of one bay of a cross-frame that carries a substringer at its middle, kg: chords for R s / 4 over its depth,
- * diagonals for R / 2, as struts; never less than an ordinary frame.
+ * diagonals for R / 2, as struts; the top chord is held at its middle, the bottom chord is not. Never less than an ordinary
+ * frame.
  */
 export function carryingFrameKg(
-  { onFrameKN }: Substringers,
-  spacingM: number,
-  girderM: number,
-  fyMPa: number,
+  { onFrameKN }: Pick<Substringers, 'onFrameKN'>,
+  { standardId, layout: { spacingM }, girderM, yieldMPa }: FrameBay,
   leastKgPerM: number,
 ): number {
   const { frameDepthOverGirder, strutShare } = compositeData.substringers;
   const depthM = frameDepthOverGirder * girderM;
   const diagonalM = Math.hypot(depthM, spacingM / 2);
-  const stress = strutShare * fyMPa * 1000;
-  const perM = (forceKN: number): number =>
-    Math.max(leastKgPerM, (materials.steelDensityKgM3 * forceKN) / stress);
-  const chord = perM((onFrameKN * spacingM) / 4 / depthM);
-  const diagonal = perM(((onFrameKN / 2) * diagonalM) / depthM);
-  return 2 * spacingM * chord + 2 * diagonalM * diagonal;
+  const stress = strutShare * yieldMPa(0.03) * 1000;
+  const perM = (forceKN: number, lengthM: number): number =>
+    Math.max(leastKgPerM, (materials.steelDensityKgM3 * forceKN) / stress, strutKgPerM(lengthM, standardId));
+  const chordKN = (onFrameKN * spacingM) / 4 / depthM;
+  const diagonal = perM(((onFrameKN / 2) * diagonalM) / depthM, diagonalM);
+  return spacingM * (perM(chordKN, spacingM / 2) + perM(chordKN, spacingM)) + 2 * diagonalM * diagonal;
 }
