@@ -66,7 +66,10 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
         clearance.toM + 4,
         clearance.toM + 11,
         clearance.toM + 15,
-        ...[0.7, 0.5, 0.3].map((part) => clearance.fromM + part * (clearance.toM - clearance.fromM)),
+        // Within an envelope that is wide enough for the words.
+        ...[0.7, 0.5, 0.3]
+          .filter(() => (clearance.toM - clearance.fromM) * frame.pxPerM > 150)
+          .map((part) => clearance.fromM + part * (clearance.toM - clearance.fromM)),
       ],
       levelM: clearance.datumLevelM,
       words: `${level(clearance.datumLevelM)} ${kind === 'railway' ? 'rail' : kind}`,

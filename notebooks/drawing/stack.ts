@@ -1,10 +1,11 @@
 import { moneyUnit } from '../format.ts';
-import type { AppraisedOption } from '../model.ts';
+import type { AppraisedOption, Site } from '../model.ts';
 import { formInk } from '../forms/formInk.ts';
 import { linearAxis, spreadValues } from './axis.ts';
 import { chainagesShown, crossingScale } from './elevation.ts';
 import { narrowStack } from './narrowStack.ts';
 import type { Piece } from './piece.ts';
+import type { Scale } from './scale.ts';
 import type { StackInput, StackSheet } from './stackSheet.ts';
 import { narrowBelow } from './stackSheet.ts';
 import { rowHeight, stackFoot, stackHead, wideStack } from './wideStack.ts';
@@ -13,6 +14,15 @@ export type { StackInput } from './stackSheet.ts';
 
 /** Where the axis of cost starts, right of the elevations, px. */
 const costStart = 100;
+
+/** Scale of the elevations of a stack, the stretch they show and their width: what stands under them takes the same. */
+export function stackChainage(site: Site, widthPx: number, asked?: Scale) {
+  const narrow = widthPx < narrowBelow;
+  const costPx = narrow ? 0 : Math.min(244, Math.max(200, widthPx * 0.2));
+  const bodyPx = widthPx - costPx;
+  const scale = asked ?? crossingScale(site, bodyPx, narrow ? 2 : 16);
+  return { narrow, bodyPx, scale, shown: chainagesShown(site, bodyPx, scale) } as const;
+}
 
 /** What all rows share, and the width of the elevations. */
 function layOut(input: StackInput): {
@@ -25,10 +35,7 @@ function layOut(input: StackInput): {
     input.options.flatMap((option) => option.units.map((unit) => unit.form)),
     input.prefix ?? 'stack',
   );
-  const narrow = input.widthPx < narrowBelow;
-  const costPx = narrow ? 0 : Math.min(244, Math.max(200, input.widthPx * 0.2));
-  const bodyPx = input.widthPx - costPx;
-  const scale = input.scale ?? crossingScale(input.site, bodyPx, narrow ? 2 : 16);
+  const { narrow, bodyPx, scale, shown } = stackChainage(input.site, input.widthPx, input.scale);
   const largest = Math.max(0, ...input.options.map((option) => option.cost.p90));
   const values = spreadValues(
     input.options.map((option) => option.cost),
@@ -38,7 +45,7 @@ function layOut(input: StackInput): {
     input,
     ink,
     scale,
-    shown: chainagesShown(input.site, bodyPx, scale),
+    shown,
     axis: narrow
       ? linearAxis(values, 4, input.widthPx - 4)
       : // Right of the prices per m2, so that the line of the budget does not run through them.

@@ -1,8 +1,11 @@
 import type { Appraisal, Site } from '../../lib/index.ts';
+import { tableBehind } from '../charts/table.ts';
 import { crossing } from '../drawing/crossing.ts';
 import { chooseReference, listenToStack, type ChooseReference } from '../drawing/listenToStack.ts';
 import { largestScale, pxPerMetre } from '../drawing/scale.ts';
-import { stack, stackOnPaper } from '../drawing/stack.ts';
+import { roadProfile } from '../drawing/roadProfile.ts';
+import { needTable, roadTable } from '../drawing/roadTable.ts';
+import { stack, stackChainage, stackOnPaper } from '../drawing/stack.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
@@ -124,6 +127,28 @@ export function arrangementSection(
       body: (v) => h('div', { class: 'prose' }, asItStandsNote(v.asItStands, v.books.currency)),
     }),
     stackCell,
+    page.cell({
+      station: '3+025',
+      title: 'Road over the reference',
+      shows: { reference, site },
+      wide: true,
+      body: (v, room) => {
+        if (!v.reference) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
+        const { bodyPx: widthPx, scale, shown } = stackChainage(v.site, room.widthPx);
+        return [
+          roadProfile({ site: v.site, option: v.reference, widthPx, scale, shown, prefix: 'road' }),
+          tableBehind(roadTable(v.reference)),
+          v.site.soffitLimits.length > 0 && tableBehind(needTable(v.site, v.reference)),
+        ];
+      },
+      notes: [
+        h(
+          'p',
+          {},
+          'On the chainage of the elevations above, with heights exaggerated as it says. Heavy lines: the road level that each headroom or flood needs for the depth of the reference. Dashed: the road as proposed. Circles: where a curve begins or ends.',
+        ),
+      ],
+    }),
     page.cell({
       station: '3+030',
       title: 'Main opening at a larger scale',

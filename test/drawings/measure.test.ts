@@ -1,5 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { constructionDepth, CROSSFALL, sizeableForms, type AppraisedOption } from '../../lib/index.ts';
+import {
+  constructionDepth,
+  CROSSFALL,
+  roadLevelAt,
+  sizeableForms,
+  type AppraisedOption,
+} from '../../lib/index.ts';
 import { exampleNames, type ExampleName } from '../../notebooks/examples.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
 import { deckStrips } from '../../notebooks/drawing/deckStrips.ts';
@@ -7,6 +13,8 @@ import { elevation, wantsWidth } from '../../notebooks/drawing/elevation.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { plan } from '../../notebooks/drawing/plan.ts';
 import { section } from '../../notebooks/drawing/section.ts';
+import { roadProfile } from '../../notebooks/drawing/roadProfile.ts';
+import { stackChainage } from '../../notebooks/drawing/stack.ts';
 import { mainDesign } from '../../notebooks/drawing/sectionRow.ts';
 import { toSvgFile } from '../../notebooks/drawing/toText.ts';
 import { expectGolden } from './golden.ts';
@@ -16,7 +24,8 @@ import { chainagesOf, measureOption, near, READING_PX, spareWorkedOut } from './
 import { measureUnits } from './measuring/measureUnits.ts';
 import { levelMarksOf, readPaper } from './measuring/paper.ts';
 import { stripsDrawn } from './measuring/sectionMarks.ts';
-import { having, printed, readSvg, within, type Node } from './measuring/svg.ts';
+import { depthOf } from './measuring/workedDepth.ts';
+import { crossedAt, having, parts, printed, readSvg, runsOf, within, type Node } from './measuring/svg.ts';
 
 const file = (piece: Piece): Node => readSvg(toSvgFile(piece));
 const wordsOf = (svg: Node): string[] =>
@@ -199,20 +208,68 @@ describe('deckStrips(input), measured', () => {
   });
 });
 
+describe('roadProfile(input), measured', { timeout: 120_000 }, () => {
+  it.each(exampleNames)('says how heights are exaggerated, and gives back road and needs of %s', (name) => {
+    const { site, options } = example(name).appraisal;
+    for (const option of options) {
+      const { bodyPx: widthPx, scale, shown } = stackChainage(site, 1224);
+      const svg = file(roadProfile({ site, option, widthPx, scale, shown }));
+      const said = wordsOf(svg).flatMap((text) => /^heights × (\d+)$/u.exec(text)?.[1] ?? []);
+      const times = Number(said[0] ?? 1);
+      const flat = readPaper(svg);
+      expect(flat.scale).toBe(scale);
+      // Levels by the datum, with heights as many times as large as lengths.
+      const [line] = having(svg, 'class', 'datum');
+      const datumY = runsOf(line!.children.find(({ tag }) => tag === 'path')!)[0]![0]![1];
+      const paper = {
+        ...flat,
+        pxPerM: flat.pxPerM * times,
+        levelM: (y: number) => flat.levelM(datumY) + (datumY - y) / (flat.pxPerM * times),
+      };
+      const road = parts(svg, 'road').flatMap(runsOf);
+      const x = (at: number): number => (at - shown.fromM) * flat.pxPerM;
+      const at = chainagesOf(option);
+      for (const chainageM of [...at, ...at.slice(1).map((one, i) => (one + at[i]!) / 2)]) {
+        const measured = paper.levelM(Math.max(...crossedAt(road, x(chainageM))));
+        const where = `option ${String(option.number)}, road at ${String(chainageM)}`;
+        near(paper, where, measured, roadLevelAt(option.profile, chainageM), READING_PX + 0.02);
+      }
+      const needs = having(svg, 'data-limit');
+      for (const need of needs) {
+        const limit = site.soffitLimits[Number(need.attrs['data-limit'])]!;
+        const run = runsOf(parts(need, 'level needed')[0]!)[0]!;
+        for (const [px, y] of [run[0]!, run.at(-1)!]) {
+          const chainageM = shown.fromM + px / flat.pxPerM;
+          const needed = limit.levelM + constructionDepth(site.deck, depthOf(option, chainageM));
+          near(paper, `need of ${limit.reason}`, paper.levelM(y), needed, READING_PX + 0.02);
+        }
+      }
+      expect(needs).toHaveLength(
+        site.soffitLimits.filter(({ fromM, toM }) => fromM < site.endM && toM > site.startM).length,
+      );
+    }
+  });
+});
+
 describe('golden drawings of the examples', { timeout: 120_000 }, () => {
   const sheetsOf = (name: ExampleName): Record<string, () => Piece> => {
     const { appraisal, study } = example(name);
     const { site, options, standing } = appraisal;
     const option = options.find(({ number }) => number === (study.options.reference ?? standing.leader))!;
     const widthPx = wantsWidth(site) ? 1224 : 980;
+    const { bodyPx, scale, shown } = stackChainage(site, 1224);
+    const onChainage = { widthPx: bodyPx, scale, shown };
     return {
       crossing: () => crossing({ site, option, obstacles: study.brief.obstacles, widthPx }),
       plan: () => plan({ site, option, widthPx, bar: true }),
       section: () => section({ design: mainDesign(option)!, widthPx: 580 }),
+      road: () => roadProfile({ site, option, ...onChainage }),
     };
   };
   it.each(
-    exampleNames.flatMap((name) => ['crossing', 'plan', 'section'].map((what) => [name, what] as const)),
+    exampleNames.flatMap((name) =>
+      ['crossing', 'plan', 'section', 'road'].map((what) => [name, what] as const),
+    ),
   )('%s, %s of the reference, is as it was last accepted', (name, what) => {
     expectGolden(`example-${name}-${what}`, sheetsOf(name)[what]!());
   });

@@ -12,7 +12,7 @@ import { sourceAxis, sourceSpans } from '../../notebooks/charts/sourceSpans.ts';
 import { spanChart } from '../../notebooks/charts/spanChart.ts';
 import { tradeOffs } from '../../notebooks/charts/tradeOffs.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
-import { elevation } from '../../notebooks/drawing/elevation.ts';
+import { chainagesShown, elevation } from '../../notebooks/drawing/elevation.ts';
 import { colours, pens } from '../../notebooks/drawing/ink.ts';
 import { keyLine } from '../../notebooks/drawing/keyLine.ts';
 import { label } from '../../notebooks/drawing/label.ts';
@@ -20,6 +20,7 @@ import { ladder } from '../../notebooks/drawing/ladder.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { el, g } from '../../notebooks/drawing/piece.ts';
 import { plan } from '../../notebooks/drawing/plan.ts';
+import { roadProfile } from '../../notebooks/drawing/roadProfile.ts';
 import { section } from '../../notebooks/drawing/section.ts';
 import { sectionRow } from '../../notebooks/drawing/sectionRow.ts';
 import { sheet } from '../../notebooks/drawing/sheet.ts';
@@ -119,6 +120,31 @@ export const sheets: Readonly<Record<string, () => Piece>> = {
   'section-halves': () => section({ design: second.designs[0]!, widthPx: 700 }),
   'section-concrete': () => section({ design: third.designs[0]!, widthPx: 700, paper: 'black' }),
   sections: () => sectionRow({ options: sorted, reference: 2, widthPx: 1224 }),
+  'road-profile': () =>
+    roadProfile({
+      site: lowSite,
+      option: crested(second),
+      widthPx: 980,
+      scale: 1000,
+      shown: chainagesShown(lowSite, 980, 1000),
+    }),
+  'road-profile-straight': () =>
+    roadProfile({
+      site,
+      option: second,
+      widthPx: 980,
+      scale: 1000,
+      shown: chainagesShown(site, 980, 1000),
+      paper: 'black',
+    }),
+  'road-profile-narrow': () =>
+    roadProfile({
+      site,
+      option: second,
+      widthPx: 358,
+      scale: 2500,
+      shown: chainagesShown(site, 358, 2500),
+    }),
   ladder: () => ladder({ site, option: second, obstacle: obstacles[0]! }),
   'span-chart': () =>
     spanChart({ rows: spanRows, askedM: 63, askedWords: '63 m asked: 60 clear, plus a pier', widthPx: 980 }),
