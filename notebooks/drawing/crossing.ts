@@ -13,6 +13,7 @@ import { dataBand } from './dataBand.ts';
 import { datumBelow, datumLine } from './datumLine.ts';
 import { dimensionChain } from './dimension.ts';
 import { chainagesShown, elevationBody, levelRange, optionWords, scaleOnSheet } from './elevation.ts';
+import { elevationText } from './elevationText.ts';
 import type { Frame } from './frame.ts';
 import { frameOf } from './frame.ts';
 import type { Paper } from './ink.ts';
@@ -273,5 +274,7 @@ export function crossing(input: CrossingInput): Piece {
       !withBand && datumLine(frame, datum, pens.fine),
     ],
     hands === undefined ? 'img' : 'group',
+    'drawing',
+    option === null ? undefined : { id: `${prefix}-words`, words: elevationText(site, option) },
   );
 }

@@ -4,6 +4,7 @@ import { formInk } from '../forms/formInk.ts';
 import { formLooks } from '../forms/formLook.ts';
 import type { AppraisedOption, Site } from '../model.ts';
 import { spansOf, structureTop } from './alongOption.ts';
+import { elevationText } from './elevationText.ts';
 import { datumBelow, datumLine } from './datumLine.ts';
 import type { Frame } from './frame.ts';
 import { frameOf } from './frame.ts';
@@ -123,6 +124,7 @@ export function elevation(input: ElevationInput): Piece {
   const { site, option, widthPx } = input;
   const scale = input.scale ?? crossingScale(site, widthPx, 10);
   const plain = scale >= 2000;
+  const prefix = input.prefix ?? `elevation-${String(option.number)}`;
   const range = levelRange(site, option, !plain);
   const ppm = pxPerMetre(scale);
   const top = 8;
@@ -132,18 +134,26 @@ export function elevation(input: ElevationInput): Piece {
   const ink = formInk(
     input.paper ?? 'colour',
     option.units.map((unit) => unit.form),
-    input.prefix ?? `elevation-${String(option.number)}`,
+    prefix,
   );
   const withBar = input.bar !== false;
   const height = bottom + (withBar ? (widthPx < 620 ? 58 : 44) : 6);
-  return sheet(widthPx, height, `Elevation of ${optionWords(option)}, 1 to ${String(scale)}`, [
-    ink.defs.length > 0 && el('defs', {}, ink.defs),
-    elevationBody(site, option, frame, ink, range, { plain }),
-    datumLine(frame, datum, pens.fine),
-    withBar &&
-      scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 24, {
-        rightPx: widthPx,
-        widthPx: Math.min(400, site.lengthM * ppm),
-      }),
-  ]);
+  return sheet(
+    widthPx,
+    height,
+    `Elevation of ${optionWords(option)}, 1 to ${String(scale)}`,
+    [
+      ink.defs.length > 0 && el('defs', {}, ink.defs),
+      elevationBody(site, option, frame, ink, range, { plain }),
+      datumLine(frame, datum, pens.fine),
+      withBar &&
+        scaleBar(scale, Math.max(frame.x(site.startM), 8), bottom + 24, {
+          rightPx: widthPx,
+          widthPx: Math.min(400, site.lengthM * ppm),
+        }),
+    ],
+    'img',
+    'drawing',
+    { id: `${prefix}-words`, words: elevationText(site, option) },
+  );
 }

@@ -36,9 +36,10 @@ export function gradientRow(
       const [x0, x1] = [frame.x(stretch.fromM), frame.x(stretch.toM)];
       const rise = (gradient: number): number => Math.max(-8, Math.min(8, gradient * 200));
       const [a, b] = [rise(stretch.fromGradient), rise(stretch.toGradient)];
-      const isCurve = stretch.radiusM !== null;
+      const { radiusM } = stretch;
+      const isCurve = radiusM !== null;
       const words = isCurve
-        ? `${stretch.radiusM! < 0 ? 'crest' : 'sag'} ${radius(stretch.radiusM!)}, ${percent(stretch.fromGradient)} to ${percent(stretch.toGradient)}`
+        ? `${radiusM < 0 ? 'crest' : 'sag'} ${radius(radiusM)}, ${percent(stretch.fromGradient)} to ${percent(stretch.toGradient)}`
         : percent(stretch.fromGradient);
       const lengthWords = `${words}, ${fixed(stretch.toM - stretch.fromM, 0)} m`;
       const room = x1 - x0 - 6;
@@ -48,8 +49,7 @@ export function gradientRow(
           : textWidth(words, letters.drawing) <= room
             ? words
             : '';
-      const isCrest =
-        isCurve && crestRadiusM !== null && Math.abs(Math.abs(stretch.radiusM!) - crestRadiusM) < 1;
+      const isCrest = isCurve && crestRadiusM !== null && Math.abs(Math.abs(radiusM) - crestRadiusM) < 1;
       return g(
         {},
         el('path', {
@@ -58,8 +58,7 @@ export function gradientRow(
             ? pathOf(
                 [0, 0.125, 0.25, 0.375, 0.5, 0.625, 0.75, 0.875, 1].map((t) => [
                   x0 + t * (x1 - x0),
-                  middle -
-                    (stretch.radiusM! < 0 ? 1 : -1) * (4 * t * (1 - t) - 0.5) * Math.min(9, (x1 - x0) / 5),
+                  middle - (radiusM < 0 ? 1 : -1) * (4 * t * (1 - t) - 0.5) * Math.min(9, (x1 - x0) / 5),
                 ]),
               )
             : `M${num(x0)},${num(middle + (a + b) / 4)}L${num(x1)},${num(middle - (a + b) / 4)}`,
@@ -68,7 +67,7 @@ export function gradientRow(
           'stroke-width': pens.thin,
         }),
         said !== '' &&
-          label((x0 + x1) / 2, isCurve ? middle + 11 : middle - 4 - Math.abs(a + b) / 4, said, {
+          label((x0 + x1) / 2, middle + 12, said, {
             anchor: 'middle',
             halo: true,
             figure: isCrest

@@ -101,7 +101,7 @@ export function roadProfile(input: RoadProfileInput): Piece {
   const ends = [
     ...new Set([site.startM, site.endM, ...stretches.flatMap(({ fromM, toM }) => [fromM, toM])]),
   ].sort((a, b) => a - b);
-  const within = ends.filter((at) => at >= shown.fromM && at <= shown.toM);
+  const within = ends.filter((at) => at > shown.fromM + 0.1 && at < shown.toM - 0.1);
   const levels = [
     ...needs.flatMap(({ points }) => points.map(([, m]) => m)),
     ...[...ends, ...stretches.flatMap(({ fromM, toM }) => [(fromM + toM) / 2])].map((at) =>

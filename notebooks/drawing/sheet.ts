@@ -7,6 +7,7 @@ export const lettering = "'Overpass Variable', Overpass, 'DejaVu Sans', sans-ser
 
 /**
  * Root of a drawing: true size in px (96 to the inch), named for readers who cannot see it.
+ * @param told what it shows in words, with the id they go under
  * @param role `img` for a drawing as a whole; `group` where parts of it can be chosen
  */
 export function sheet(
@@ -16,6 +17,7 @@ export function sheet(
   children: readonly Child[],
   role: 'img' | 'group' = 'img',
   className = 'drawing',
+  told?: { readonly id: string; readonly words: string },
 ): Piece {
   return el(
     'svg',
@@ -26,10 +28,12 @@ export function sheet(
       viewBox: `0 0 ${String(Math.round(width * 100) / 100)} ${String(Math.round(height * 100) / 100)}`,
       role,
       'aria-label': name,
+      'aria-describedby': told?.id,
       'font-family': lettering,
       'font-size': letters.drawing,
       fill: colours.ink,
     },
+    told !== undefined && el('desc', { id: told.id }, told.words),
     ...children,
   );
 }

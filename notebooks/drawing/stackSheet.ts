@@ -4,6 +4,7 @@ import { optionNumber } from '../forms/optionNumber.ts';
 import type { AppraisedOption, Site, Standing } from '../model.ts';
 import type { Axis } from './axis.ts';
 import { optionWords } from './elevation.ts';
+import { elevationText } from './elevationText.ts';
 import type { Frame } from './frame.ts';
 import type { Paper } from './ink.ts';
 import { colours, pens } from './ink.ts';
@@ -68,18 +69,21 @@ export function chosenRow(
   const { p10, p50, p90 } = option.cost;
   const within = input.standing.within[option.number];
   const words = `${optionWords(option)}: ${money2(p50 / unit.per)} ${unit.label}, ${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}${within === undefined ? '' : `, ${odds(within)} % within budget`}${option.status === 'out' ? ', out' : ''}`;
+  const told = `${input.prefix ?? 'stack'}-words-${String(option.number)}`;
   return g(
     {
       class: reference ? 'row reference' : 'row',
       'data-key': `row ${String(option.number)}`,
       'data-option': option.number,
     },
+    el('desc', { id: told }, elevationText(input.site, option)),
     el('rect', {
       class: 'frame',
       role: 'button',
       tabindex: 0,
       'aria-pressed': reference ? 'true' : 'false',
       'aria-label': words,
+      'aria-describedby': told,
       x: -4,
       y: top + 2,
       width: input.widthPx + 8,

@@ -16,7 +16,11 @@ const made = new WeakMap<Element, Made>();
 
 /** The value of an attribute in the page: ids inside a drawing are its own. */
 const valueIn = (own: string | null, name: string, value: string): string =>
-  own === null ? value : name === 'id' ? value + own : value.replace(/^url\(#(.+)\)$/, `url(#$1${own})`);
+  own === null
+    ? value
+    : name === 'id' || name === 'aria-describedby'
+      ? value + own
+      : value.replace(/^url\(#(.+)\)$/, `url(#$1${own})`);
 
 function build(piece: Piece, document: Document, svg: string | null): Element {
   const own = svg ?? (piece.tag === 'svg' ? `-${String((drawn += 1))}` : null);
