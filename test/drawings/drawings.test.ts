@@ -148,7 +148,7 @@ describe('stack(input)', () => {
 
   it('has one row per option that keys can reach, and presses only the reference', () => {
     expect(rows.map(({ attrs }) => attrs['data-option'])).toEqual(['1', '2', '3', '4', '5', '6']);
-    const buttons = rows.map((row) => row.children[0] as Piece);
+    const buttons = rows.map((row) => [...elements(row)].find(({ attrs }) => attrs['class'] === 'frame')!);
     for (const { attrs } of buttons) expect([attrs['role'], attrs['tabindex']]).toEqual(['button', '0']);
     expect(buttons.map(({ attrs }) => attrs['aria-pressed'])).toEqual([
       'false',
