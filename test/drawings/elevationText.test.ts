@@ -15,7 +15,7 @@ function describedBy(drawing: Piece, element: Piece): string {
   const id = element.attrs['aria-describedby'];
   const found = [...elements(drawing)].filter(({ attrs }) => attrs['id'] === id);
   expect(found, `one element of the id ${String(id)}`).toHaveLength(1);
-  return found[0]!.children.join('');
+  return found[0]!.children.filter((child) => typeof child === 'string').join('');
 }
 
 describe('elevationText(site, option)', () => {

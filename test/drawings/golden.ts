@@ -12,7 +12,10 @@ function withPlainIds(text: string): string {
   for (const [, id = ''] of text.matchAll(/ id="([^"]+)"/g))
     if (!names.has(id)) names.set(id, `id${String(names.size + 1)}`);
   return text
-    .replace(/ id="([^"]+)"/g, (_, id: string) => ` id="${names.get(id) ?? id}"`)
+    .replace(
+      / (id|aria-describedby)="([^"]+)"/g,
+      (_, name: string, id: string) => ` ${name}="${names.get(id) ?? id}"`,
+    )
     .replace(/url\(#([^)]+)\)/g, (_, id: string) => `url(#${names.get(id) ?? id})`);
 }
 
