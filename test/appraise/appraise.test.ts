@@ -1,3 +1,4 @@
+import { answerTo } from './answerTo.ts';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { appraise, roadLevelAt, type Appraisal, type Study } from '../../lib/index.ts';
 import { lowFerry, mirrored } from './studies.ts';
@@ -5,7 +6,7 @@ import { lowFerry, mirrored } from './studies.ts';
 /** One sizer for the file would hide nothing: sizing is pure. Each appraisal here starts afresh. */
 let base: Appraisal;
 beforeAll(() => {
-  base = appraise(lowFerry());
+  base = answerTo(lowFerry());
 });
 
 const withBrief = (change: Partial<Study['brief']>): Study => {
@@ -38,7 +39,7 @@ describe('appraise', { timeout: 60_000 }, () => {
   it('appraise(same study) is the same to the last figure, and another seed moves odds but no quantity', () => {
     expect(appraise(lowFerry())).toEqual(base);
     const study = lowFerry();
-    const other = appraise({ ...study, books: { ...study.books, seed: 7 } });
+    const other = answerTo({ ...study, books: { ...study.books, seed: 7 } });
     const quantities = (a: Appraisal): unknown => new Map(a.options.map((o) => [o.number, o.quantities]));
     expect(quantities(other)).toEqual(quantities(base));
     expect(cheapest(other, 'composite-i').cost.p50).not.toBe(cheapest(base, 'composite-i').cost.p50);
@@ -49,7 +50,7 @@ describe('appraise', { timeout: 60_000 }, () => {
   });
 
   it('appraise(mirrored study) mirrors every arrangement and keeps quantities', () => {
-    const other = appraise(mirrored(lowFerry()));
+    const other = answerTo(mirrored(lowFerry()));
     const spans = (a: Appraisal, back: boolean): string[] =>
       a.options
         .map((o) => {
@@ -67,7 +68,7 @@ describe('appraise', { timeout: 60_000 }, () => {
   it('appraise(wider river) needs longer spans and costs more, within reason', () => {
     const { obstacles, crossing } = lowFerry().brief;
     const wide = obstacles.map((o) => (o.name === 'River Wend' ? { ...o, fromM: 1310, toM: 1400 } : o));
-    const other = appraise(withBrief({ obstacles: wide, crossing }));
+    const other = answerTo(withBrief({ obstacles: wide, crossing }));
     const [a, b] = [cheapest(base, 'composite-i'), cheapest(other, 'composite-i')];
     expect(b.perM2.structuralSteelKg).toBeGreaterThan(1.1 * a.perM2.structuralSteelKg);
     expect(b.cost.p50).toBeGreaterThan(1.03 * a.cost.p50);
@@ -77,8 +78,8 @@ describe('appraise', { timeout: 60_000 }, () => {
   it('appraise(half the budget) lowers the chance within it and reorders nothing; no budget gives no chance', () => {
     const { budget } = lowFerry().brief;
     if (budget === 'unknown') throw new Error('the example has a budget');
-    const poor = appraise(withBrief({ budget: { ...budget, amount: budget.amount / 2 } }));
-    const free = appraise(withBrief({ budget: 'unknown' }));
+    const poor = answerTo(withBrief({ budget: { ...budget, amount: budget.amount / 2 } }));
+    const free = answerTo(withBrief({ budget: 'unknown' }));
     const order = (a: Appraisal): number[] => a.options.map((option) => option.number);
     expect(order(poor)).toEqual(order(base));
     expect(order(free)).toEqual(order(base));
@@ -91,7 +92,7 @@ describe('appraise', { timeout: 60_000 }, () => {
   it('appraise(dearer steel) moves steel decks more than concrete ones', () => {
     const study = lowFerry();
     const steel = { item: 'plate-girder-steel', p10: 5, p50: 7, p90: 10, reason: 'trial' };
-    const other = appraise({ ...study, books: { ...study.books, rates: [steel] } });
+    const other = answerTo({ ...study, books: { ...study.books, rates: [steel] } });
     const rise = (form: string): number => cheapest(other, form).cost.p50 / cheapest(base, form).cost.p50;
     expect(rise('composite-i')).toBeGreaterThan(1.03);
     expect(rise('concrete-box')).toBeCloseTo(1, 2);
@@ -102,7 +103,7 @@ describe('appraise', { timeout: 60_000 }, () => {
     const higher = obstacles.map((o) =>
       o.clearance && o.kind === 'railway' ? { ...o, clearance: { ...o.clearance, headroomM: 6.6 } } : o,
     );
-    const other = appraise(withBrief({ obstacles: higher }));
+    const other = answerTo(withBrief({ obstacles: higher }));
     for (const option of other.options) {
       const fouled = option.headroom !== null && option.headroom.spareM < 0;
       if (fouled) expect(option.status).toBe('out');
@@ -119,7 +120,7 @@ describe('appraise', { timeout: 60_000 }, () => {
     const wide = study.brief.obstacles.map((o) =>
       o.name === 'River Wend' ? { ...o, fromM: 1290, toM: 1440 } : o,
     );
-    const other = appraise({
+    const other = answerTo({
       ...study,
       brief: { ...study.brief, obstacles: wide },
       options: { ...study.options, workOutAnyway: [] },
@@ -131,7 +132,7 @@ describe('appraise', { timeout: 60_000 }, () => {
 
   it('appraise(study with a register) keeps numbers for life', () => {
     const study = lowFerry();
-    const again = appraise({ ...study, options: { ...study.options, register: base.register } });
+    const again = answerTo({ ...study, options: { ...study.options, register: base.register } });
     expect(again.register).toEqual(base.register);
     const numbers = (a: Appraisal): string[] => a.options.map((o) => `${o.number} ${o.form}`).sort();
     expect(numbers(again)).toEqual(numbers(base));

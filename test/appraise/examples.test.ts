@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
-import { appraise, memory, ratesFor, type Appraisal, type Study } from '../../lib/index.ts';
+import { ratesFor, type Appraisal, type Study } from '../../lib/index.ts';
 import { workedExample, type ExampleName } from '../../notebooks/examples.ts';
+import { answerTo } from './answerTo.ts';
 
-const kept = memory();
 const study = (name: ExampleName): Study => {
   const whole = workedExample(name);
   return { ...whole, books: { ...whole.books, draws: 1000 } };
@@ -46,14 +46,14 @@ describe('worked examples', { timeout: 120_000 }, () => {
     ['stonebeck-lane', 'a headroom of 5.50 m where 5.35 m is not confirmed', clearing(5.5)],
     ['tanners-yard', 'girder steel at the dear end of its range', dear('plate-girder-steel')],
   ] as const)('%s is open: two families lead together, and %s changes what leads', (name, _, changed) => {
-    const before = appraise(study(name), kept);
+    const before = answerTo(study(name));
     expect(new Set(leading(before).map(({ family }) => family)).size).toBeGreaterThanOrEqual(2);
-    const after = appraise(changed(study(name)), kept);
+    const after = answerTo(changed(study(name)));
     expect(leader(after)).not.toBe(leader(before));
   });
 
   it('sarrow-estuary is open: a stayed bridge and a box lead together, and girder steel at the dear end of its range changes the family', () => {
-    const before = appraise(study('sarrow-estuary'), kept);
+    const before = answerTo(study('sarrow-estuary'));
     const { options } = before;
     const family = ({ options: all, standing }: Appraisal): string =>
       all.find(({ number }) => number === standing.leader)!.family;
@@ -66,7 +66,7 @@ describe('worked examples', { timeout: 120_000 }, () => {
       for (const { supportsM } of units)
         for (const x of supportsM) expect(x <= 2570 || x >= 2810, `support at ${x}`).toBe(true);
     }
-    const after = appraise(dear('plate-girder-steel')(study('sarrow-estuary')), kept);
+    const after = answerTo(dear('plate-girder-steel')(study('sarrow-estuary')));
     expect(family(after)).not.toBe(family(before));
   });
 });

@@ -1,11 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import { appraise, memory, type Appraisal, type FormId, type Unit } from '../../lib/index.ts';
+import { type Appraisal, type FormId, type Unit } from '../../lib/index.ts';
 import { arrangementFacts } from '../../lib/appraise/facts.ts';
 import { rulingsFor } from '../../lib/rules/index.ts';
 import { survey } from '../../lib/site/index.ts';
 import { lowFerry } from './studies.ts';
-
-const kept = memory();
+import { answerTo } from './answerTo.ts';
 
 /** The worked example with one option kept by hand and composite I-girders proposed beside it. */
 function withKept(supportsM: readonly number[], form: FormId = 'composite-i', pylons?: number[]): Appraisal {
@@ -13,14 +12,11 @@ function withKept(supportsM: readonly number[], form: FormId = 'composite-i', py
   const unit: Unit = { form, role: 'main', supportsM, ...(pylons ? { pylons } : {}) };
   const method = form === 'cable-stayed' ? 'stay-cantilever' : 'crane';
   const option = { number: 1, form, method, units: [unit], depthM: null } as const;
-  return appraise(
-    {
-      ...study,
-      books: { ...study.books, draws: 500 },
-      options: { ...study.options, forms: ['composite-i'], kept: [option] },
-    },
-    kept,
-  );
+  return answerTo({
+    ...study,
+    books: { ...study.books, draws: 500 },
+    options: { ...study.options, forms: ['composite-i'], kept: [option] },
+  });
 }
 const first = ({ options }: Appraisal): Appraisal['options'][number] =>
   options.find(({ number }) => number === 1)!;

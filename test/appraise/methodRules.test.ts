@@ -2,8 +2,9 @@ import { describe, expect, it } from 'vitest';
 import { launchYardNeeded } from '../../lib/appraise/launchYardNeeded.ts';
 import { halfDeckNeeded, pickMoment, widening } from '../../lib/appraise/methodFacts.ts';
 import { pickRadius } from '../../lib/appraise/pickRadius.ts';
-import { appraise, survey, type FormId, type Study } from '../../lib/index.ts';
+import { survey, type FormId, type Study } from '../../lib/index.ts';
 import { lowFerry } from './studies.ts';
+import { answerTo } from './answerTo.ts';
 
 type Change = Partial<Pick<Study['brief'], 'access' | 'demands' | 'deck'>>;
 
@@ -17,7 +18,7 @@ const asked = (forms: readonly FormId[], change: (brief: Study['brief']) => Chan
   };
 };
 const effects = (study: Study, rule: string) =>
-  appraise(study).options.map(({ method, rulings }) => [
+  answerTo(study).options.map(({ method, rulings }) => [
     method,
     rulings.find((ruling) => ruling.rule === rule)?.effect,
   ]);

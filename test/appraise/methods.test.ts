@@ -1,6 +1,7 @@
 import { expect, it } from 'vitest';
-import { appraise, type Study } from '../../lib/index.ts';
+import type { Study } from '../../lib/index.ts';
 import { lowFerry } from './studies.ts';
+import { answerTo } from './answerTo.ts';
 
 /** The worked example with composite girders alone and other access. */
 const withAccess = (access: Partial<Study['brief']['access']>): Study => {
@@ -13,7 +14,7 @@ const withAccess = (access: Partial<Study['brief']['access']>): Study => {
   };
 };
 const rulingsOf = (study: Study) =>
-  appraise(study).options.map(({ method, rulings }) => ({
+  answerTo(study).options.map(({ method, rulings }) => ({
     method,
     crane: rulings.find(({ rule }) => rule === 'crane-none')?.effect,
     railway: rulings.find(({ rule }) => rule === 'railway-possession')?.effect,

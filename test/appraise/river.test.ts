@@ -1,6 +1,7 @@
 import { expect, it } from 'vitest';
-import { appraise, type AppraisedOption, type Study, type Water } from '../../lib/index.ts';
+import type { AppraisedOption, Study, Water } from '../../lib/index.ts';
 import { lowFerry } from './studies.ts';
+import { answerTo } from './answerTo.ts';
 
 /** The worked example with a pier in its river, and the river known as far as said. */
 function inRiver(more: Partial<Water>): Study {
@@ -35,7 +36,7 @@ function inRiver(more: Partial<Water>): Study {
 }
 
 const kept = (more: Partial<Water>): AppraisedOption =>
-  appraise(inRiver(more)).options.find(({ number }) => number === 40)!;
+  answerTo(inRiver(more)).options.find(({ number }) => number === 40)!;
 const effects = (option: AppraisedOption): Record<string, string> =>
   Object.fromEntries(option.rulings.map(({ rule, effect }) => [rule, effect]));
 

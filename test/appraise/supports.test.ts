@@ -1,6 +1,7 @@
 import { expect, it } from 'vitest';
-import { appraise, type Study } from '../../lib/index.ts';
+import type { Study } from '../../lib/index.ts';
 import { lowFerry } from './studies.ts';
+import { answerTo } from './answerTo.ts';
 
 /** The worked example with firm ground far below any pile: nothing can be founded on it. */
 function bottomless(): Study {
@@ -25,7 +26,7 @@ function bottomless(): Study {
 }
 
 it('appraise(ground that carries nothing) puts the option out with its reason and still prices it', () => {
-  const { options } = appraise(bottomless());
+  const { options } = answerTo(bottomless());
   expect(options.length).toBeGreaterThan(0);
   for (const { status, rulings, cost } of options) {
     expect(status).toBe('out');

@@ -5,9 +5,10 @@ import { memory } from '../../lib/appraise/memory.ts';
 import { finish } from '../../lib/appraise/work.ts';
 import { workbench, type Workbench } from '../../lib/appraise/workbench.ts';
 import { girderVariants } from '../../lib/forms/composite-i/girderVariants.ts';
-import { appraiseKept, appraise, survey, type Option, type Study, type Variant } from '../../lib/index.ts';
+import { appraiseKept, survey, type Option, type Study, type Variant } from '../../lib/index.ts';
 import { expectedLines } from '../../lib/substructure/index.ts';
 import { lowFerry } from './studies.ts';
+import { answerTo } from './answerTo.ts';
 
 /** An invented channel crossed by four spans of composite girders, its deck of some lanes; the road lies as low as it may. */
 function channel(lanes: number, mainM: number): Study {
@@ -140,7 +141,7 @@ it('appraiseKept(haunched option) drags it as it is made', () => {
       kept: [{ number, form, method, units, depthM: null, variant: { haunchRatio: 1.6 } }],
     },
   };
-  const option = appraise(asked).options.find((one) => one.number === 1)!;
+  const option = answerTo(asked).options.find((one) => one.number === 1)!;
   const dragged = appraiseKept(study, option, kept).option!;
   expect(dragged.designs).toEqual(option.designs);
   expect(dragged.cost).toEqual(option.cost);

@@ -1,8 +1,6 @@
-import { appraise, memory, type Appraisal, type Study } from '../../lib/index.ts';
+import type { Appraisal, Study } from '../../lib/index.ts';
 import { workedExample, type ExampleName } from '../../notebooks/examples.ts';
-
-/** What was worked out for one test serves the others that run beside it. */
-export const kept = memory();
+import { answerTo } from './answerTo.ts';
 
 const studies = new Map<ExampleName, Study>();
 
@@ -16,13 +14,5 @@ export function exampleStudy(name: ExampleName): Study {
   return study;
 }
 
-const answers = new Map<ExampleName, Appraisal>();
-
-/** A worked example worked out, once for all tests of a process. */
-export function workedOut(name: ExampleName): Appraisal {
-  const known = answers.get(name);
-  if (known !== undefined) return known;
-  const answer = appraise(exampleStudy(name), kept);
-  answers.set(name, answer);
-  return answer;
-}
+/** A worked example worked out. */
+export const workedOut = (name: ExampleName): Appraisal => answerTo(exampleStudy(name));

@@ -1,6 +1,7 @@
-import { appraise, type Study } from '../../lib/index.ts';
+import type { Study } from '../../lib/index.ts';
 import type { Context } from '../../lib/explain/index.ts';
 import { lowFerry } from '../appraise/studies.ts';
+import { answerTo } from '../appraise/answerTo.ts';
 
 const made = new Map<string, Context>();
 
@@ -9,7 +10,7 @@ function once(name: string, study: () => Study): Context {
   const found = made.get(name);
   if (found) return found;
   const asked = study();
-  const context = { study: asked, appraisal: appraise(asked) };
+  const context = { study: asked, appraisal: answerTo(asked) };
   made.set(name, context);
   return context;
 }

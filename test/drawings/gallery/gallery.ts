@@ -23,9 +23,10 @@ import type { HtmlChild } from '../../../notebooks/html.ts';
 import { h } from '../../../notebooks/html.ts';
 import type { Paper } from '../../../notebooks/drawing/ink.ts';
 import lowFerry from '../../../data/examples/low-ferry.json?raw';
-import { appraise, readStudy } from '../../../lib/index.ts';
+import { readStudy } from '../../../lib/index.ts';
 import * as invented from '../fixture.ts';
 import { checks, depthPoints, measures, published, spanRows } from '../figures.ts';
+import { answerTo } from '../../appraise/answerTo.ts';
 
 const asked = new URLSearchParams(location.search);
 /** `?study` shows the worked example as it is worked out; otherwise the figures drawn up by hand. */
@@ -35,7 +36,7 @@ function worked(): Omit<typeof invented, 'options' | 'crested' | 'lowSite'> & {
   const read = readStudy(lowFerry);
   if (!read.ok) throw new RangeError(JSON.stringify(read.problems));
   const study = read.value;
-  const appraisal = appraise(study);
+  const appraisal = answerTo(study);
   const money = study.brief.budget === 'unknown' ? invented.budget : study.brief.budget.amount;
   return {
     site: appraisal.site,

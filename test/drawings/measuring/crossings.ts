@@ -1,6 +1,7 @@
-import { appraise, type Appraisal, type FormId, type Study } from '../../../lib/index.ts';
+import type { Appraisal, FormId, Study } from '../../../lib/index.ts';
 import { exampleNames, type ExampleName } from '../../../notebooks/examples.ts';
-import { exampleStudy, kept, workedOut } from '../../appraise/workedOut.ts';
+import { exampleStudy, workedOut } from '../../appraise/workedOut.ts';
+import { answerTo } from '../../appraise/answerTo.ts';
 
 /** A crossing that has been worked out, with the study it is of. */
 export interface Crossed {
@@ -28,7 +29,7 @@ function oneCarriageway(form: FormId): Crossed {
     },
     options: { ...whole.options, forms: [form], workOutAnyway: [form] },
   };
-  return { name: `one carriageway of Stonebeck Lane, ${form}`, study, appraisal: appraise(study, kept) };
+  return { name: `one carriageway of Stonebeck Lane, ${form}`, study, appraisal: answerTo(study) };
 }
 
 /** An example in which a form is worked out, or else a short crossing made for it. */

@@ -1,5 +1,4 @@
 import { describe, expect, it } from 'vitest';
-import { appraise } from '../../../lib/index.ts';
 import { figure, figurePaths } from '../../../lib/explain/index.ts';
 import { quantityOf } from '../../../lib/forms/common/measured.ts';
 import { compositeBox } from '../../../lib/forms/composite-box/index.ts';
@@ -7,6 +6,7 @@ import { formModule } from '../../../lib/forms/index.ts';
 import { itemOf } from '../../../lib/takeoff/index.ts';
 import { lowFerry } from '../../appraise/studies.ts';
 import { tubTask } from './cases.ts';
+import { answerTo } from '../../appraise/answerTo.ts';
 
 const usual = tubTask([48, 60, 48], 2.6);
 const useOf = (design: ReturnType<typeof compositeBox.size>, id: string): number =>
@@ -95,7 +95,7 @@ it(
       books: { ...study.books, draws: 1000 },
       options: { ...study.options, forms: ['composite-box' as const], kept: [] },
     };
-    const context = { study: boxes, appraisal: appraise(boxes) };
+    const context = { study: boxes, appraisal: answerTo(boxes) };
     expect(context.appraisal.options.length).toBeGreaterThan(0);
     const unsaid = figurePaths(context).filter((path) =>
       /its unit stands at the end of its name|^(demand|capacity) of the check '/u.test(

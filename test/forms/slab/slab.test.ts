@@ -1,5 +1,4 @@
 import { describe, expect, it } from 'vitest';
-import { appraise } from '../../../lib/index.ts';
 import { figure, figurePaths } from '../../../lib/explain/index.ts';
 import { quantityOf } from '../../../lib/forms/common/measured.ts';
 import { crackWidthMm } from '../../../lib/forms/slab/crackedSection.ts';
@@ -9,6 +8,7 @@ import { concrete } from '../../../lib/actions/index.ts';
 import { itemOf } from '../../../lib/takeoff/index.ts';
 import { lowFerry } from '../../appraise/studies.ts';
 import { deck, slabTask } from './cases.ts';
+import { answerTo } from '../../appraise/answerTo.ts';
 
 const useOf = (design: ReturnType<typeof slab.size>, id: string): number =>
   design.checks.find((check) => check.id === id)!.utilisation;
@@ -141,7 +141,7 @@ it('appraise(study) with slabs explains every figure of theirs in its own words'
     books: { ...study.books, draws: 1000 },
     options: { ...study.options, forms: ['slab' as const], kept: [] },
   };
-  const context = { study: narrow, appraisal: appraise(narrow) };
+  const context = { study: narrow, appraisal: answerTo(narrow) };
   expect(context.appraisal.options.length).toBeGreaterThan(0);
   const unsaid = figurePaths(context).filter((path) =>
     /its unit stands at the end of its name|^(demand|capacity) of the check '/u.test(
