@@ -53,11 +53,12 @@ const limitEnd = (at: At, end: 'from' | 'to'): string => {
     : `${behind.water}/flood${end === 'from' ? 'From' : 'To'}M`;
 };
 
-const zoneEnd = (at: At, end: 'fromM' | 'toM'): string => {
+/** Where the brief says something of a zone. */
+const zoneInBrief = (at: At, what: 'fromM' | 'toM' | 'pierPremium'): string => {
   const barring = at.study.brief.obstacles.flatMap((obstacle, i) =>
     obstacle.supports === 'none' ? [] : [i],
   );
-  return `brief/obstacles/${barring[at.index('i')]}/${end}`;
+  return `brief/obstacles/${barring[at.index('i')]}/${what}`;
 };
 
 /** Ends of the barred stretches that run into one another under the main opening. */
@@ -144,10 +145,19 @@ export const siteFigures: readonly Descriptor[] = [
       unit: 'm',
       method: 'as given',
       formula: 'read from the brief',
-      inputs: (at) => ({ given: zoneEnd(at, end) }),
+      inputs: (at) => ({ given: zoneInBrief(at, end) }),
       compute: ({ given }) => given,
     }),
   ),
+  described({
+    path: 'site/zones/:i/pierPremium',
+    label: (at) => `sum for a support in ${zoneName(at)}, ${at.study.books.currency}`,
+    unit: '',
+    method: 'as given',
+    formula: 'read from the brief',
+    inputs: (at) => ({ given: zoneInBrief(at, 'pierPremium') }),
+    compute: ({ given }) => given,
+  }),
   described({
     path: 'site/soffitLimits/:i/levelM',
     label: (at) => `lowest soffit: ${limitName(at)}`,
