@@ -25,6 +25,7 @@ import {
   barredPiers,
   depthHandle,
   freeBar,
+  pierBays,
   pierFeet,
   pierHandles,
   spanChanges,
@@ -261,6 +262,7 @@ export function crossing(input: CrossingInput): Piece {
       hands !== undefined && [
         input.obstacles !== undefined && briefHandles(site, input.obstacles, frame, hands.hold),
         option !== null && [
+          pierBays(site, option, frame),
           spanFigures(option, frame, dimensionBottom - 8),
           depthHandle(site, option, frame, hands.hold),
           pierHandles(option, frame, hands),

@@ -1,6 +1,14 @@
 import { fixed, level } from '../format.ts';
 import type { AppraisedOption, Site } from '../model.ts';
-import { placedUnits, soffitLevel, spansOf, supportChainages, supportName } from './alongOption.ts';
+import {
+  groundLevel,
+  placedUnits,
+  roadLevel,
+  soffitLevel,
+  spansOf,
+  supportChainages,
+  supportName,
+} from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { barredAt, freeStretches } from './freeStretches.ts';
 import { handle, typedFigure } from './handle.ts';
@@ -198,6 +206,33 @@ export function spanChanges(option: AppraisedOption, hold: Hold | null): string[
     const change = span - ((before[i + 1] ?? NaN) - (before[i] ?? NaN));
     return Math.abs(change) < 0.05 ? '' : ` (${change < 0 ? '−' : '+'}${Math.abs(change).toFixed(1)})`;
   });
+}
+
+/**
+ * Where a pier can be put with a double click: a bay for each span, from its road down to the ground. They catch no pointer
+ * themselves, so that figures and handles over them answer as ever.
+ */
+export function pierBays(site: Site, option: AppraisedOption, frame: Frame): Piece {
+  const at = supportChainages(option);
+  return g(
+    { class: 'bays', 'pointer-events': 'none' },
+    at.slice(1).map((toM, i) => {
+      const fromM = at[i]!;
+      if (toM <= frame.fromM || fromM >= frame.toM) return null;
+      const top = Math.min(frame.y(roadLevel(option, fromM)), frame.y(roadLevel(option, toM))) - 8;
+      const foot = Math.max(frame.y(groundLevel(site, fromM)), frame.y(groundLevel(site, toM))) + 4;
+      return el('rect', {
+        'data-bay': `span/${String(i)}`,
+        'data-from': String(fromM),
+        'data-to': String(toM),
+        x: frame.x(fromM),
+        y: top,
+        width: (toM - fromM) * frame.pxPerM,
+        height: Math.max(foot - top, 20),
+        fill: 'none',
+      });
+    }),
+  );
 }
 
 /** The spans of an option as figures that are typed over in their dimension line at y. */

@@ -18,6 +18,7 @@ import {
   barredPiers,
   depthHandle,
   freeBar,
+  pierBays,
   pierFeet,
   pierHandles,
   spanChanges,
@@ -157,6 +158,7 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
     hands === undefined
       ? []
       : [
+          pierBays(site, option, frame),
           spanFigures(option, frame, dimensionY - 8),
           depthHandle(site, option, frame, hands.hold),
           pierHandles(option, frame, hands),

@@ -52,7 +52,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
       h(
         'p',
         {},
-        'Point at the drawing: piers, soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier.',
+        'Point at the drawing: piers, soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier, Delete removes it, + in a span adds one.',
       ),
       h(
         'p',

@@ -10,7 +10,7 @@ export function keptOf({ options }: Study, option: AppraisedOption): KeptOption 
 }
 
 /** The study with an option kept by hand, which becomes the reference: what is in hand is what is looked at. */
-function withKept(study: Study, kept: KeptOption): Study {
+export function withKept(study: Study, kept: KeptOption): Study {
   const { options } = study;
   const others = options.kept.filter(({ number }) => number !== kept.number);
   return {
@@ -24,10 +24,10 @@ function withKept(study: Study, kept: KeptOption): Study {
 }
 
 /** Two supports that are one, m. */
-const SAME_M = 0.05;
+export const SAME_M = 0.05;
 
 /** Chainages of all supports of a row of units in order, each once, m. */
-function placesOf(units: readonly Unit[]): number[] {
+export function placesOf(units: readonly Unit[]): number[] {
   const all = units.flatMap(({ supportsM }) => supportsM).sort((a, b) => a - b);
   return all.filter((at, i) => i === 0 || at - all[i - 1]! > SAME_M);
 }
@@ -49,15 +49,15 @@ export function withPier(study: Study, option: AppraisedOption, index: number, c
   return withKept(study, { ...kept, units: moved(kept.units, here, to) });
 }
 
-/** What comes of a span that was typed: the study, or why it cannot be had. */
-export type SpanTyped =
+/** What comes of something that was asked for by hand: the study, or why it cannot be had. */
+export type Changed =
   { readonly ok: true; readonly study: Study } | { readonly ok: false; readonly why: string };
 
 /**
  * The study with a span of a given length, m: the support at its end moves, or the one at its start where that one is locked
  * or an abutment; the next span takes up the difference.
  */
-export function withSpan(study: Study, option: AppraisedOption, span: number, lengthM: number): SpanTyped {
+export function withSpan(study: Study, option: AppraisedOption, span: number, lengthM: number): Changed {
   const kept = keptOf(study, option);
   const places = placesOf(kept.units);
   const [fromM, toM] = [places[span]!, places[span + 1]!];

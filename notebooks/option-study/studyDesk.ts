@@ -2,7 +2,8 @@ import type { AppraisedOption } from '../../lib/index.ts';
 import { supportChainages } from '../drawing/alongOption.ts';
 import type { HandDesk, StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
-import { handEdit, keptOf, withLock, withSpan } from './handEdits.ts';
+import { handEdit, keptOf, withLock, withSpan, type Changed } from './handEdits.ts';
+import { withPierAdded, withPierRemoved, withSpanParted } from './pierCount.ts';
 import type { StudyCells } from './studyCells.ts';
 
 /** What the handles of the study's drawings do: each go at one is one step of undo. */
@@ -20,6 +21,20 @@ export function studyDesk(graph: Graph, store: StudyStore, cells: StudyCells): H
       graph.set(hold, null);
       finish();
     });
+  };
+  /** Number of a support or span in a key; NaN for the key of anything else. */
+  const indexIn = (key: string, kind: 'pier' | 'span'): number => {
+    const [of, index] = key.split('/');
+    return of === kind ? Number(index) : NaN;
+  };
+  /** Makes a change to the reference in one step of undo; says why it cannot be made, or null. */
+  const change = (what: string, by: (held: AppraisedOption) => Changed): string | null => {
+    const held = now();
+    if (held === null) return 'there is no option to change';
+    const changed = by(held);
+    if (!changed.ok) return changed.why;
+    store.edit(() => changed.study, { what });
+    return null;
   };
   return {
     take(key, valueM) {
@@ -42,6 +57,14 @@ export function studyDesk(graph: Graph, store: StudyStore, cells: StudyCells): H
       store.edit((study) => edit.put(study, value), { what: edit.what });
       return null;
     },
+    add: (bay, at) =>
+      change('adding a pier', (held) =>
+        withPierAdded(store.valid(), held, indexIn(bay, 'span'), at ?? undefined),
+      ),
+    remove: (key) =>
+      change('removing a pier', (held) => withPierRemoved(store.valid(), held, indexIn(key, 'pier'))),
+    part: (key, lengths) =>
+      change('adding a pier', (held) => withSpanParted(store.valid(), held, indexIn(key, 'span'), lengths)),
     letGo: () => end(store.endStep),
     back: () => end(store.dropStep),
     lock(key) {

@@ -20,6 +20,8 @@ export interface Drag {
   readonly cancel: () => void;
   /** Pressed and released in place. */
   readonly tap?: () => void;
+  /** A finger drags it as well: for things whose style keeps the page from scrolling with it. */
+  readonly byFinger?: boolean;
 }
 
 /** Movement that still counts as a press in place, px. */
@@ -46,12 +48,15 @@ export function untilDragRests(signal: AbortSignal): Promise<void> {
 
 /**
  * Makes an element draggable with mouse or pen. The drag lives on the document, so that it goes on when a new drawing
- * takes the place of the element under the pointer. Touch is left to the browser, which scrolls with it.
+ * takes the place of the element under the pointer. Touch is left to the browser, which scrolls with it, unless asked for.
  */
-export function draggable(element: Element, { may, start, move, end, cancel, tap }: Drag): void {
+export function draggable(
+  element: Element,
+  { may, start, move, end, cancel, tap, byFinger = false }: Drag,
+): void {
   element.addEventListener('pointerdown', (event) => {
     const down = event as PointerEvent;
-    if (down.button !== 0 || !down.isPrimary || down.pointerType === 'touch') return;
+    if (down.button !== 0 || !down.isPrimary || (down.pointerType === 'touch' && !byFinger)) return;
     if (may?.(down) === false) return;
     const page = element.ownerDocument;
     const listening = new AbortController();

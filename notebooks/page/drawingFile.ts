@@ -6,7 +6,7 @@ import { saveFile } from './files.ts';
 import { printDrawing } from './printDrawing.ts';
 
 /** Parts of a drawing that are for the hand and not for paper. */
-const forHands = /^(?:handles?|feet|free)\b/u;
+const forHands = /^(?:handles?|bays|feet|free)\b/u;
 
 /** A drawing without its handles. */
 export function withoutHandles(piece: Piece): Piece {

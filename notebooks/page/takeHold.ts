@@ -16,6 +16,12 @@ export interface HandDesk {
   readonly back: () => void;
   /** The key for locking was pressed on it. */
   readonly lock: (key: string) => void;
+  /** One more is wanted in a bay of the drawing, at a value or in its middle; says why it cannot be had, or null. */
+  readonly add: (bay: string, value: number | null) => string | null;
+  /** A handle is to go; says why it stays, or null. */
+  readonly remove: (key: string) => string | null;
+  /** A figure was typed as the sum of two; says why it cannot be parted so, or null. */
+  readonly part: (key: string, values: readonly [number, number]) => string | null;
 }
 
 /** What a handle says of itself in its attributes. */
@@ -72,8 +78,9 @@ const stepKeys: Readonly<Record<string, number>> = {
 };
 
 /**
- * Makes the handles of the drawings in a part of the page answer: dragged with mouse or pen, stepped with the arrow keys,
- * typed after Enter or a digit. Escape takes back, L locks. The handles may be drawn anew at any time; `root` stays.
+ * Makes the handles of the drawings in a part of the page answer: dragged with mouse, pen or finger, stepped with the arrow keys,
+ * typed after Enter or a digit. Escape takes back, L locks, Delete or a double click takes a handle away, plus or a double
+ * click between handles puts one there, two lengths typed as a sum part a span. The handles may be drawn anew at any time; `root` stays.
  * @returns where refusals are said, to be put into the page
  */
 export function takeHold(root: Element, desk: HandDesk): HTMLElement {
@@ -90,6 +97,9 @@ export function takeHold(root: Element, desk: HandDesk): HTMLElement {
     stepped = null;
     desk.letGo();
   };
+
+  const sayWhy = ({ element }: Handle, why: string | null): void =>
+    say(why === null ? '' : `${element.getAttribute('aria-label') ?? ''}: refused, ${why}.`);
 
   const isHeldFast = ({ isLocked }: Handle): boolean => {
     say(isLocked ? 'Locked: press L to free it.' : '');
@@ -120,16 +130,26 @@ export function takeHold(root: Element, desk: HandDesk): HTMLElement {
       handle.element.classList.remove('held');
       if (hasFocus) handle.element.focus();
     };
+    const figureIn = (text: string): number | string => {
+      const read = readFigure(text, { places: handle.places, unit: 'm' });
+      return !read.ok ? read.why : read.value === 'unknown' ? 'a figure is needed' : read.value;
+    };
+    /** Why what was typed cannot be had, or null where it was done. */
+    const done = (): string | null => {
+      const [first = '', second, ...more] = box.value.split('+');
+      const value = figureIn(first);
+      if (typeof value === 'string') return value;
+      if (second === undefined) return desk.type(handle.key, value);
+      const other = figureIn(second);
+      if (typeof other === 'string') return other;
+      return more.length > 0
+        ? 'one pier at a time: two lengths are needed'
+        : desk.part(handle.key, [value, other]);
+    };
     const keep = (hasFocus: boolean): void => {
       if (!isOpen) return;
       if (box.value.trim() === was) return close(hasFocus);
-      const read = readFigure(box.value, { places: handle.places, unit: 'm' });
-      const why =
-        read.ok && read.value !== 'unknown'
-          ? desk.type(handle.key, read.value)
-          : read.ok
-            ? 'a figure is needed'
-            : read.why;
+      const why = done();
       const name = handle.element.getAttribute('aria-label') ?? '';
       say(why === null ? '' : `${name}: refused, ${why}. ${was} is kept.`);
       close(hasFocus);
@@ -153,6 +173,7 @@ export function takeHold(root: Element, desk: HandDesk): HTMLElement {
   };
 
   draggable(root, {
+    byFinger: true,
     may(event) {
       dragged = handleAt(event.target);
       if (dragged === null) return false;
@@ -224,9 +245,37 @@ export function takeHold(root: Element, desk: HandDesk): HTMLElement {
       endSteps();
       say('');
       desk.lock(handle.key);
+    } else if (key === 'Delete' || key === 'Backspace') {
+      endSteps();
+      sayWhy(handle, desk.remove(handle.key));
+    } else if (key === 'Insert' || key === '+') {
+      endSteps();
+      sayWhy(handle, desk.add(handle.key, null));
     } else return;
     event.preventDefault();
     event.stopPropagation();
+  });
+  // Twice on a handle takes it away, twice in a bay between handles puts one there.
+  root.addEventListener('dblclick', (event) => {
+    const { target, clientX, clientY } = event as MouseEvent;
+    if (!(target instanceof Element) || target.closest('input, .read-only') !== null) return;
+    const handle = handleAt(target);
+    if (handle !== null) {
+      if (!handle.isTyped) sayWhy(handle, desk.remove(handle.key));
+      return;
+    }
+    for (const bay of root.querySelectorAll('[data-bay]')) {
+      const { left, right, top, bottom } = bay.getBoundingClientRect();
+      if (clientX < left || clientX > right || clientY < top || clientY > bottom) continue;
+      const [fromM, toM] = ['data-from', 'data-to'].map((name) => Number(bay.getAttribute(name))) as [
+        number,
+        number,
+      ];
+      const value = fromM + ((clientX - left) / (right - left)) * (toM - fromM);
+      const why = desk.add(bay.getAttribute('data-bay')!, rounded(value, 0.5));
+      say(why === null ? '' : `Refused: ${why}.`);
+      return;
+    }
   });
   root.addEventListener('focusout', (event) => {
     if (stepped !== null && handleAt(event.target)?.key === stepped.key) endSteps();

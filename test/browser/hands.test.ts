@@ -153,6 +153,90 @@ describe('by hand', () => {
     await settled(page);
   });
 
+  it('a double click between two piers adds one, Delete removes it, each in one step of undo', async () => {
+    const piers = () => page.locator(`${CROSSING} [data-handle^="pier/"]`);
+    const before = await piers().count();
+    await page.locator(`${CROSSING} svg`).first().scrollIntoViewIfNeeded();
+    const box = (await page.locator(`${CROSSING} [data-bay="span/0"]`).boundingBox())!;
+    await page.mouse.dblclick(box.x + box.width * 0.4, box.y + box.height - 8);
+    await page.waitForFunction(
+      ([selector, count]) => document.querySelectorAll(selector as string).length === count,
+      [`${CROSSING} [data-handle^="pier/"]`, before + 1] as const,
+    );
+    await settled(page);
+    await undoIs('Undo adding a pier');
+    expect(await textOf('[id="3+010"]')).toContain('is kept by hand');
+    expect(await valueOf('pier/1')).toBeLessThan(await valueOf('pier/2'));
+    await handle('pier/1').focus();
+    await page.keyboard.press('Delete');
+    await page.waitForFunction(
+      ([selector, count]) => document.querySelectorAll(selector as string).length === count,
+      [`${CROSSING} [data-handle^="pier/"]`, before] as const,
+    );
+    await settled(page);
+    await undoIs('Undo removing a pier');
+    await page.getByRole('button', { name: 'Undo', exact: true }).click();
+    await settled(page);
+    expect(await piers().count()).toBe(before + 1);
+    await page.getByRole('button', { name: 'Undo', exact: true }).click();
+    await settled(page);
+    expect(await piers().count()).toBe(before);
+    expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+  });
+
+  it('two lengths typed as a sum part a span; those that do not make it up are refused', async () => {
+    const spans = () => page.locator(`${STACK} [data-handle^="span/"]`);
+    const before = await spans().count();
+    const whole = await valueOf('span/0', STACK);
+    await handle('span/0', STACK).locator('.grip').click();
+    await page.keyboard.type(`20 + ${String(whole - 18)}`);
+    await page.keyboard.press('Enter');
+    await page.waitForFunction(() =>
+      document.querySelector('[id="3+020"] .hand-said')?.textContent.includes('must make up'),
+    );
+    await handle('span/0', STACK).locator('.grip').click();
+    await page.keyboard.type(`20 + ${String(whole - 20)}`);
+    await page.keyboard.press('Enter');
+    await page.waitForFunction(
+      ([selector, count]) => document.querySelectorAll(selector as string).length === count,
+      [`${STACK} [data-handle^="span/"]`, before + 1] as const,
+    );
+    await settled(page);
+    expect(await valueOf('span/0', STACK)).toBe(20);
+    await undoIs('Undo adding a pier');
+  });
+
+  it('a finger on a handle drags it and does not scroll the page', async () => {
+    const before = await valueOf('pier/1');
+    const grip = handle('pier/1').locator('.grip');
+    await grip.scrollIntoViewIfNeeded();
+    expect(await grip.evaluate((element) => getComputedStyle(element).touchAction)).toBe('none');
+    expect(
+      await page
+        .locator(`${CROSSING} svg`)
+        .first()
+        .evaluate((element) => getComputedStyle(element).touchAction),
+    ).toBe('auto');
+    const box = (await grip.boundingBox())!;
+    const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+    const scrolled = await page.evaluate(() => window.scrollY);
+    const devTools = await page.context().newCDPSession(page);
+    const touch = (type: 'touchStart' | 'touchMove' | 'touchEnd', dx: number): Promise<unknown> =>
+      devTools.send('Input.dispatchTouchEvent', {
+        type,
+        touchPoints: type === 'touchEnd' ? [] : [{ x: x + dx, y: y + dx / 4 }],
+      });
+    await touch('touchStart', 0);
+    for (const dx of [8, 16, 24]) await touch('touchMove', dx);
+    await changed('pier/1', before);
+    await touch('touchEnd', 24);
+    await settled(page);
+    await devTools.detach();
+    expect(await valueOf('pier/1')).toBeGreaterThan(before + 3);
+    expect(await page.evaluate(() => window.scrollY)).toBe(scrolled);
+    await undoIs('Undo moving a pier');
+  });
+
   it.each([
     ['obstacle/1/to', 16, 0, '1+030'],
     ['clearance/0', 0, -10, '1+030'],
