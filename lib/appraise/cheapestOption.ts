@@ -13,7 +13,7 @@ const PAYS = 0.01;
 /** A variant at the depth where it is first tried may be this much dearer and still have its own depth sought. */
 const PROMISES = 1.03;
 /** Midspan depth at which a variant is first tried over the best of constant depth. */
-const FIRST_TRY = { haunched: 0.9, straight: 1.2 } as const;
+const FIRST_TRY = { haunched: 0.9, substringers: 1.2, other: 1 } as const;
 
 /** Depth of least cost of an option made one way, m, and what it comes to. */
 interface Made {
@@ -73,9 +73,15 @@ function* cheapestMade(bench: Workbench, plain: Made): Work<Made> {
   return isBetter(made.trial, plain.trial) ? made : plain;
 }
 
-function firstTryM(bench: Workbench, option: Option, { haunchRatio }: Variant, plainM: number): number {
+function firstTryM(
+  bench: Workbench,
+  option: Option,
+  { haunchRatio, substringers }: Variant,
+  plainM: number,
+): number {
   const [least, most] = depthsToTry(bench, option, mainUnit(option.units));
-  const share = haunchRatio === undefined ? FIRST_TRY.straight : FIRST_TRY.haunched;
+  const share =
+    haunchRatio !== undefined ? FIRST_TRY.haunched : substringers ? FIRST_TRY.substringers : FIRST_TRY.other;
   return Math.round(Math.min(most, Math.max(least, share * plainM)) * 20) / 20;
 }
 

@@ -38,8 +38,11 @@ export function keptUnits(
   const placed = between(site, units);
   if (placed === null) return { because: [BEYOND_ABUTMENT] };
   const because = placed.map(unsizeable).filter((fault) => fault !== null);
-  const made = formModule(form);
-  if (Object.keys(variant).length > 0 && !made.variants)
-    because.push(`${made.name}: made in one way only, no haunch or substringers expected`);
+  const { name, choices = [] } = formModule(form);
+  const foreign = Object.keys(variant).filter((key) => !choices.some((choice) => choice === key));
+  if (foreign.length > 0) {
+    const has = choices.length === 0 ? 'it is made in one way only' : `it has ${choices.join(', ')}`;
+    because.push(`${name}: ${foreign.join(', ')} cannot be chosen; ${has}`);
+  }
   return because.length > 0 ? { because } : { units: placed };
 }

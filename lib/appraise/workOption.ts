@@ -72,14 +72,15 @@ const CLEAR_CLASS_M = 0.25;
 
 /** What a variant asks of the task of a unit at a depth, m. */
 function madeAs(
-  { haunchRatio, substringers }: Variant = {},
+  { haunchRatio, substringers, transverse }: Variant = {},
   depthM: number,
-): Pick<UnitTask, 'haunch' | 'substringers'> {
+): Pick<UnitTask, 'haunch' | 'substringers' | 'transverse'> {
   return {
     ...(haunchRatio === undefined
       ? {}
       : { haunch: { pierDepthM: Math.round(haunchRatio * depthM * STEPS) / STEPS, law: 'parabolic' } }),
     ...(substringers ? { substringers } : {}),
+    ...(transverse ? { transverse } : {}),
   };
 }
 

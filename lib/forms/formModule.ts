@@ -28,6 +28,8 @@ export interface FormModule {
   readonly joined?: 'after-placing' | 'never';
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
   readonly ignoresHeight?: true;
+  /** Of the choices of a variant those that the form has. */
+  readonly choices?: readonly (keyof Variant)[];
   /**
    * Other ways of making a unit than the plain one that are worth pricing for its spans (m), deck and method; absent where
    * the form leaves no choice.

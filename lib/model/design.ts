@@ -19,6 +19,8 @@ export interface UnitTask {
   readonly haunch?: Haunch;
   /** Composite I-girders: beams between the girders, carried by the cross-frames, so that the slab spans half the spacing. */
   readonly substringers?: boolean;
+  /** Concrete boxes: tendons across the top slab, so that fewer cells carry the deck. */
+  readonly transverse?: true;
   /** Thickness of an orthotropic deck plate, m, where it is given; by wheels and surfacing when absent. */
   readonly deckPlateM?: number;
   /** Cable-stayed: which supports (0-based) carry pylons. */

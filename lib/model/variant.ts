@@ -4,4 +4,6 @@ export interface Variant {
   readonly haunchRatio?: number;
   /** Beams between the girders, so that fewer girders carry the slab. */
   readonly substringers?: true;
+  /** Tendons across the top slab of a concrete box, so that fewer cells carry it. */
+  readonly transverse?: true;
 }

@@ -180,6 +180,7 @@ const unit = z.strictObject({
 const variant = z.strictObject({
   haunchRatio: z.number().gt(1).max(4).exactOptional(),
   substringers: z.literal(true).exactOptional(),
+  transverse: z.literal(true).exactOptional(),
 });
 
 const options = z.strictObject({

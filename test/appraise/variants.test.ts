@@ -125,7 +125,7 @@ describe('workOption(variant that was chosen)', () => {
     const units = [{ form: 'concrete-box', role: 'main', supportsM: [startM, endM] }] as const;
     const placed = keptUnits(site, { form: 'concrete-box', units, variant: { haunchRatio: 2 } });
     expect(placed).toMatchObject({
-      because: [expect.stringMatching(/no haunch or substringers expected/u)],
+      because: [expect.stringMatching(/haunchRatio cannot be chosen; it has transverse/u)],
     });
   });
 });

@@ -1,4 +1,4 @@
-import type { Study } from '../../lib/index.ts';
+import type { KeptOption, Study, Variant } from '../../lib/index.ts';
 import type { Context } from '../../lib/explain/index.ts';
 import { lowFerry } from '../appraise/studies.ts';
 import { answerTo } from '../appraise/answerTo.ts';
@@ -153,5 +153,51 @@ export const frame = (): Context =>
       },
       books: { ...books, draws: 1000 },
       options: { ...options, forms: ['portal-frame'], workOutAnyway: [] },
+    };
+  });
+
+/** The crossing with a wide deck under HL-93, its options kept by hand in every way that a form leaves open. */
+export const variants = (): Context =>
+  once('variants', () => {
+    const study = lowFerry();
+    const { brief, books, options } = study;
+    const { startM, endM } = brief.crossing;
+    const strip = (kind: 'parapet' | 'lane' | 'footway', widthM: number) => ({
+      kind,
+      widthM,
+      ultimateWidthM: widthM,
+    });
+    const supportsM = [startM, startM + 0.28 * (endM - startM), startM + 0.72 * (endM - startM), endM];
+    const kept = (number: number, form: 'composite-i' | 'concrete-box', variant: Variant): KeptOption => ({
+      number,
+      form,
+      method: form === 'composite-i' ? 'crane' : 'falsework',
+      units: [{ form, role: 'main', supportsM }],
+      depthM: null,
+      variant,
+    });
+    return {
+      ...study,
+      brief: {
+        ...brief,
+        loading: 'hl93',
+        deck: [
+          strip('parapet', 0.5),
+          ...Array.from({ length: 4 }, () => strip('lane', 3.5)),
+          strip('footway', 2.5),
+          strip('parapet', 0.5),
+        ],
+        demands: { lanesKept: 2, gasMain: 'outside' },
+      },
+      books: { ...books, draws: 1000 },
+      options: {
+        ...options,
+        forms: ['composite-i'],
+        workOutAnyway: ['composite-i', 'concrete-box'],
+        kept: [
+          kept(40, 'composite-i', { haunchRatio: 1.6, substringers: true }),
+          kept(41, 'concrete-box', { transverse: true }),
+        ],
+      },
     };
   });

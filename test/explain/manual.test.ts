@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { figure, figurePaths, rebuilt, type Context } from '../../lib/explain/index.ts';
 import { bibliography } from '../../lib/rules/index.ts';
-import { example, frame, inFlood, otherwise } from './contexts.ts';
+import { example, frame, inFlood, otherwise, variants } from './contexts.ts';
 
 /** Name, study, and how many figures it has at the least. */
 const contexts: readonly (readonly [name: string, context: () => Context, least: number])[] = [
@@ -9,6 +9,7 @@ const contexts: readonly (readonly [name: string, context: () => Context, least:
   ['the crossing seen otherwise', otherwise, 1000],
   ['the crossing in a known flood', inFlood, 1000],
   ['a portal frame', frame, 300],
+  ['options made in every way', variants, 500],
 ];
 
 /** What holds a number that is not a figure: names of options, units, supports, stretches and waters, and what is drawn. */

@@ -1,6 +1,7 @@
 import type { Descriptor } from '../../model/index.ts';
 import { formManual } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
+import { acrossFigures } from '../concrete-box/acrossFigures.ts';
 import { stages, tendons, type Row } from './stageFigures.ts';
 
 const manual = formManual('cantilever-box');
@@ -12,7 +13,7 @@ const section: readonly Row[] = [
     'cells',
     'cells of the box',
     'no',
-    'as few as keep the webs within their practical spacing',
+    'as few as keep the webs within their practical spacing, which is wider where tendons run across the slab',
     './task/deck/widthM',
   ],
   ['webs', 'webs of the box', 'no', 'cells + 1', 'cells'],
@@ -25,8 +26,20 @@ const section: readonly Row[] = [
     'cells',
   ],
   ['overhangM', 'overhang beyond the outer web', 'm', 'share of the web spacing', 'webSpacingM'],
-  ['topSlabMidM', 'top slab between the webs', 'm', 'least thickness with practical bars', 'webSpacingM'],
-  ['topSlabRootM', 'top slab over the webs', 'm', 'least thickness with practical bars', 'overhangM'],
+  [
+    'topSlabMidM',
+    'top slab between the webs',
+    'm',
+    'least thickness with practical bars or tendons',
+    'webSpacingM',
+  ],
+  [
+    'topSlabRootM',
+    'top slab over the webs',
+    'm',
+    'least thickness with practical bars or tendons',
+    'overhangM',
+  ],
   [
     'webM',
     'web in the spans',
@@ -96,4 +109,5 @@ const section: readonly Row[] = [
 export const cantileverFigures: readonly Descriptor[] = [
   ...[...section, ...stages, ...tendons].map((row) => sized(...row)),
   ...slabCheckFigures(manual, 'topSlabMidM'),
+  ...acrossFigures(manual),
 ];

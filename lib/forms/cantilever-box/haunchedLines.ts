@@ -1,6 +1,6 @@
 import type { MeasuredLine } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
-import { diaphragmForms, strandKg } from '../concrete-box/boxLines.ts';
+import { acrossLines, diaphragmForms, strandKg } from '../concrete-box/boxLines.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import { cantileverData } from './cantileverData.ts';
@@ -81,6 +81,7 @@ export function haunchedLines(model: CantileverModel, box: SizedHaunched): Measu
       'tendons of the spans',
       `up to ${Math.max(...found.bottom)} strands in the bottom slab, ending towards the supports`,
     ),
+    ...acrossLines(model),
     measured(
       'deck',
       'box-formwork',

@@ -53,6 +53,9 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     overhangM: layout.overhangM,
     topSlabMidM: layout.slab.midM,
     topSlabRootM: layout.slab.rootM,
+    ...(layout.across
+      ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
+      : {}),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,

@@ -2,6 +2,7 @@ import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { overLimit } from '../common/warnings.ts';
+import { boxVariants } from '../concrete-box/boxVariants.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
 import { choosePierDepth } from './choosePierDepth.ts';
@@ -27,6 +28,8 @@ export const cantileverBox: FormModule = {
     { kind: 'flanked', approach: 'composite-i', side: [0.55, 0.7] },
   ],
   methods: ['balanced-cantilever'],
+  choices: ['transverse'],
+  variants: boxVariants,
   size,
 };
 

@@ -26,6 +26,7 @@ export const compositeI: FormModule = {
   pattern: { kind: 'continuous' },
   methods: ['crane', 'launch'],
   ignoresHeight: true,
+  choices: ['haunchRatio', 'substringers'],
   variants: girderVariants,
   size,
 };

@@ -7,6 +7,15 @@ const number = z.number();
 
 const schema = z.object({
   layout: z.object({ overhangOverSpacing: number, mostWebSpacingM: number, source }),
+  across: z.object({
+    mostWebSpacingM: number,
+    axisM: number,
+    strandsPerTendon: number,
+    closestM: number,
+    clearOverThickness: number,
+    mostThicknessM: number,
+    source,
+  }),
   webSlope: z.object({ most: number, bottomOverTop: number, source }),
   webLeastM: citedByStandard,
   webLeastLaunchedM: citedByStandard,

@@ -47,6 +47,7 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
       `${layout.webs} webs, ${group.tendonsPerWeb} tendons of ${group.strandsPerTendon.toFixed(1)} strands each${tendons.meanShare < 1 ? `, ${(100 * tendons.meanShare).toFixed(0)} % of them along the mean of the deck` : ''}`,
     ),
   ];
+  lines.push(...acrossLines(model));
   if (tendons.straightStrands > 0)
     lines.push(
       measured(
@@ -69,6 +70,24 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
   );
   if (task.method !== 'launch') lines.push(falsework(model));
   return lines;
+}
+
+/** Tendons across the top slab, where it has them. */
+export function acrossLines({
+  layout: { across },
+  lengthM,
+  task,
+}: Pick<BoxModel, 'layout' | 'lengthM' | 'task'>): MeasuredLine[] {
+  if (!across) return [];
+  return [
+    measured(
+      'deck',
+      'prestress',
+      across.strandKgM2 * lengthM * task.deck.widthM,
+      'tendons across the top slab',
+      `${across.forceKNm.toFixed(0)} kN per m of deck after losses, ${across.strandKgM2.toFixed(1)} kg/m2`,
+    ),
+  ];
 }
 
 /** Strand along the deck, kg. */

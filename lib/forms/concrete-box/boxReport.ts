@@ -55,6 +55,9 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     overhangM: layout.overhangM,
     topSlabMidM: layout.slab.midM,
     topSlabRootM: layout.slab.rootM,
+    ...(layout.across
+      ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
+      : {}),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,

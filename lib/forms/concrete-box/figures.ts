@@ -1,4 +1,5 @@
 import type { At, Descriptor } from '../../model/index.ts';
+import { acrossFigures } from './acrossFigures.ts';
 import { formManual, linesOf, spansOf } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { boxCheckFigures } from './checkFigures.ts';
@@ -30,9 +31,10 @@ export const boxFigures: readonly Descriptor[] = [
     'cells',
     'cells of the box',
     'no',
-    'as few as keep the webs within their practical spacing',
+    'as few as keep the webs within their practical spacing, which is wider where tendons run across the slab',
     './task/deck/widthM',
     'data/concrete-box/layout/mostWebSpacingM',
+    'data/concrete-box/across/mostWebSpacingM',
     'data/concrete-box/layout/overhangOverSpacing',
   ),
   figure('webs', {
@@ -76,7 +78,7 @@ export const boxFigures: readonly Descriptor[] = [
       name,
       label,
       'm',
-      'least thickness in steps at which its bars stay within a practical ratio',
+      'least thickness in steps at which its bars stay within a practical ratio, or its tendons within the closest',
       'webSpacingM',
       'overhangM',
       'data/slab/steelRatioMost',
@@ -231,4 +233,5 @@ export const boxFigures: readonly Descriptor[] = [
   }),
   ...boxCheckFigures,
   ...slabCheckFigures(manual, 'topSlabMidM'),
+  ...acrossFigures(manual),
 ];

@@ -9,6 +9,7 @@ import { boxElevation, boxSections } from './boxDrawing.ts';
 import { boxFigures, boxReactions, ownWeightShare } from './boxReport.ts';
 import { boxLines } from './boxLines.ts';
 import { boxModel } from './boxModel.ts';
+import { boxVariants } from './boxVariants.ts';
 import { heightUnder } from './heightUnder.ts';
 import { sizeBox } from './sizeBox.ts';
 
@@ -23,6 +24,8 @@ export const concreteBox: FormModule = {
   name: 'Concrete box',
   pattern: { kind: 'continuous' },
   methods: ['falsework', 'launch'],
+  choices: ['transverse'],
+  variants: boxVariants,
   size,
 };
 

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { designSlab, type SlabCase } from '../../../lib/forms/common/slab/designSlab.ts';
+import { designSlab } from '../../../lib/forms/common/slab/designSlab.ts';
+import type { SlabCase } from '../../../lib/forms/common/slab/slabCase.ts';
 import { stripInfluence } from '../../../lib/forms/common/slab/stripInfluence.ts';
 import { plainDeck } from '../composite-i/cases.ts';
 

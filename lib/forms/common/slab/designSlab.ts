@@ -1,25 +1,10 @@
-import type { Check, DeckSpec, StandardId } from '../../../model/index.ts';
+import type { Check, StandardId } from '../../../model/index.ts';
 import { loadStandard, type LoadStandard } from '../../../actions/index.ts';
 import { barDesignMPa, barKg } from '../bars.ts';
 import { check } from '../checks.ts';
-import { superimposedOn } from '../superimposed.ts';
+import type { SlabCase } from './slabCase.ts';
 import { slabData } from './slabData.ts';
-import { overhangTraffic, spanTraffic } from './slabTraffic.ts';
-
-/** A deck slab on parallel lines: girders or webs (it spans across the road) or cross-girders (along the road). */
-export interface SlabCase {
-  readonly standard: StandardId;
-  readonly deck: DeckSpec;
-  readonly direction: 'across' | 'along';
-  /** Distance between the supporting lines, m. */
-  readonly spacingM: number;
-  /** Length beyond the outer line, m; 0 where there is none. Only with `across`. */
-  readonly overhangM: number;
-  /** True on more than two lines or on stiff webs; false on two girders free to turn. */
-  readonly continuous: boolean;
-  /** Same thickness from line to line and in the overhang (level soffit); otherwise thicker over the lines. */
-  readonly uniform: boolean;
-}
+import { slabMoments, type SlabMoments } from './slabMoments.ts';
 
 /** Thickness and bars of a deck slab. Moments are design values per metre of slab. */
 export interface SlabDesign {
@@ -36,12 +21,6 @@ export interface SlabDesign {
   readonly checks: readonly Check[];
 }
 
-interface Moments {
-  readonly permanent: number;
-  readonly superimposed: number;
-  readonly traffic: number;
-}
-
 /**
  * Designs a deck slab for its own weight, surfacing, edges and wheels: the least thickness in steps of 10 mm at which
  * the bars of one face stay within a practical ratio, and the bars. Haunches run over a quarter of the spacing.
@@ -52,27 +31,7 @@ export function designSlab(slab: SlabCase): SlabDesign {
   const d = slabData;
   const step = d.stepM.value;
   const least = Math.max(d.leastThicknessM[slab.standard], slab.spacingM / d.spanOverThickness.value);
-  const surfacing = superimposedOn(slab.deck);
-  const gamma = standard.unitWeights.concreteKNm3;
-  const factor = slab.continuous ? d.continuity.value : 1;
-  const span = slab.spacingM;
-  const trafficSpan = spanTraffic(slab, standard);
-  const trafficRoot = slab.overhangM > 0 ? overhangTraffic(slab, standard) : 0;
-
-  const spanMoments = (t: number): Moments => ({
-    permanent: (factor * gamma * t * span * span) / 8,
-    superimposed: (factor * surfacing.surfacingKNm2 * span * span) / 8,
-    traffic: factor * trafficSpan,
-  });
-  const arm = Math.max(0, slab.overhangM - edgeArmM);
-  const edgeM = Math.max(d.leastEdgeM.value, d.leastThicknessM[slab.standard]);
-  const overhangMoments = (t: number): Moments => ({
-    permanent: gamma * slab.overhangM ** 2 * (edgeM / 2 + (t - edgeM) / 6),
-    superimposed: (surfacing.surfacingKNm2 * slab.overhangM ** 2) / 2 + (surfacing.edgesKNm / 2) * arm,
-    traffic: trafficRoot,
-  });
-  const innerRootMoments = (t: number): Moments =>
-    slab.continuous ? spanMoments(t) : { permanent: 0, superimposed: 0, traffic: 0 };
+  const { spanMoments, overhangMoments, innerRootMoments, edgeM } = slabMoments(slab);
 
   const mid = thicknessFor(least, step, (t) => demand(spanMoments(t), t, slab.standard, standard));
   const rootLeast = slab.overhangM > 0 ? Math.max(mid.thicknessM, edgeM) : mid.thicknessM;
@@ -129,9 +88,6 @@ export function designSlab(slab: SlabCase): SlabDesign {
   };
 }
 
-/** Middle of a barrier from the edge of the deck, m. */
-const edgeArmM = 0.25;
-
 interface BarDemand {
   readonly momentKNm: number;
   /** Bars needed per metre, m2/m. */
@@ -140,7 +96,7 @@ interface BarDemand {
 }
 
 /** Bars of one face at ultimate and in service: As = M / (z f). */
-function demand(moments: Moments, thicknessM: number, id: StandardId, standard: LoadStandard): BarDemand {
+function demand(moments: SlabMoments, thicknessM: number, id: StandardId, standard: LoadStandard): BarDemand {
   const { uls } = standard.factors;
   const ultimate =
     uls.permanent * moments.permanent +
@@ -171,10 +127,10 @@ function thicknessFor(
  * Bars of both faces, kg per m2 of deck: span bars between the lines, root bars over the overhang and a quarter of the
  * spacing on each side of a line, the least ratio elsewhere.
  */
-function barMass(
+export function barMass(
   insideShare: number,
-  mid: BarDemand,
-  root: BarDemand,
+  mid: Pick<BarDemand, 'areaM2'>,
+  root: Pick<BarDemand, 'areaM2'>,
   midM: number,
   rootM: number,
 ): { readonly mainBarsKgM2: number; readonly crossBarsKgM2: number } {
