@@ -18,7 +18,8 @@ const GRID_M = 5;
 /** Cost of the whole crossing at mean rates, worked out by every stage. */
 function fullCost(bench: Workbench, form: FormId, method: MethodId, supportsM: readonly number[]): number {
   const units = [{ form, role: 'main', supportsM } as const];
-  const option = { number: 1, form, method, units, depthM: null, origin: 'kept' } as const;
+  // Plain girders: the arrangement is looked at, not how its girders are made.
+  const option = { number: 1, form, method, units, depthM: null, variant: {}, origin: 'kept' } as const;
   const { lines, supports } = finish(workOption(bench, option)).option;
   const feet = supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
   return bench.costOf([...lines, ...feet]);
