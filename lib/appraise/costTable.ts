@@ -20,6 +20,8 @@ export interface TableShelf {
   readonly tableFor: (asked: FormAndMethod) => CostTable;
   /** The rows that the table of one form is read off: its own and those of its approaches. */
   readonly rowsOf: (asked: FormAndMethod) => readonly TrialRows[];
+  /** Longest side span over a main span, m, with which the back-stays of a unit on two pylons stay taut. */
+  readonly tautSide: (asked: FormAndMethod, mainM: number) => number;
 }
 
 /**
@@ -77,6 +79,11 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
   };
   return {
     tableFor,
+    tautSide(asked, mainM) {
+      const { spansM, row } = rowsFor(asked);
+      const next = spansM.findIndex((spanM) => spanM >= mainM);
+      return row(next < 0 ? spansM.length - 1 : next).tautSide;
+    },
     rowsOf(asked) {
       const { pattern, alsoPatterns = [] } = formModule(asked.form);
       const patterns = pattern.kind === 'continuous' ? alsoPatterns : [pattern];

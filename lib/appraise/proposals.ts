@@ -1,6 +1,6 @@
 import { arrange } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { Arrangement, FormId, MethodId, Pattern, Site } from '../model/index.ts';
+import type { Arrangement, FormId, MethodId, Pattern } from '../model/index.ts';
 import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import { arrangementFacts } from './facts.ts';
@@ -8,6 +8,7 @@ import type { Proposals } from './memory.ts';
 import { relaxationWords } from './relaxationWords.ts';
 import { requestFor } from './requestFor.ts';
 import { ruledOut } from './ruledOut.ts';
+import type { FormAndMethod } from './trialRows.ts';
 import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
 
@@ -51,9 +52,18 @@ export function* proposalsFor(bench: Workbench, form: FormId): Work<Proposals> {
   return store.get(key) ?? store.put(key, yield* search(bench, form));
 }
 
-/** Patterns of a form that are searched on a site: approaches to a flanked unit need something to lead up to and their own spans. */
-function patternsFor(site: Site, form: FormId): readonly Pattern[] {
+/**
+ * Patterns of a form that are searched on a site: approaches to a flanked unit need something to lead up to and their own
+ * spans; side spans beyond pylons are no longer than keeps back-stays taut.
+ */
+function patternsFor({ site, tables }: Workbench, asked: FormAndMethod): readonly Pattern[] {
+  const { form } = asked;
   const { pattern, alsoPatterns = [] } = formModule(form);
+  if (pattern.kind === 'pylon') {
+    const [least, most] = pattern.twoPylonSide;
+    const taut = tables.tautSide(asked, site.mainOpening?.widthM ?? 0);
+    return [{ ...pattern, twoPylonSide: [least, Math.max(least, Math.min(most, taut))] }];
+  }
   if (site.mainOpening === null) return [pattern];
   return [pattern, ...alsoPatterns.filter(({ approach }) => openSpans(approach, site.lengthM))];
 }
@@ -78,7 +88,7 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
       for (const index of rows.spansM.keys()) yield* rows.make(index);
     }
     const found: Arrangement[] = [];
-    for (const pattern of patternsFor(site, form)) {
+    for (const pattern of patternsFor(bench, asked)) {
       const result = arrange(requestFor(asked, site, pattern), site, bench.tables.tableFor(asked));
       for (const dropped of result.dropped) count(dropped.reason, dropped.count);
       if (found.length === 0) because.push(...result.relaxations.map(relaxationWords));

@@ -1,8 +1,10 @@
 import { remembered } from '../kept.ts';
-import type { MeasuredLine, Site } from '../model/index.ts';
-import { groundAt, stretchAt } from '../site/index.ts';
+import type { MeasuredLine, RoadProfile, Site } from '../model/index.ts';
+import { constructionDepth, groundAt, roadLevelAt, stretchAt } from '../site/index.ts';
 import { expectedLines, placeText, settingAt, standPierBetween } from '../substructure/index.ts';
 import type { Memory } from './memory.ts';
+import { ORDINARY_DEPTH_M } from './meanClearance.ts';
+import { profileOrNearest } from './profileOrNearest.ts';
 import type { RowMakers } from './trialRows.ts';
 
 /**
@@ -10,9 +12,8 @@ import type { RowMakers } from './trialRows.ts';
  * read off straight lines. A pier feels the form it carries through its load.
  */
 export const PIER_LOADS_KN = [1500, 4000, 8000, 14000, 24000, 45000, 90000] as const;
-/** Of that load, what is permanent, and the depth of the deck on it, m: ordinary road decks. */
+/** Of that load, what is permanent: ordinary road decks. */
 const PIER_PERMANENT = 0.7;
-const PIER_DECK_DEPTH_M = 2;
 /** Span over which the trial load is spread, m: gives wind and friction their size. */
 const PIER_SPAN_M = 40;
 
@@ -47,15 +48,17 @@ export function trialPiers(
   { site, costOf }: Pick<RowMakers, 'site' | 'costOf'>,
   piers: Memory['piers'],
 ): PierCost {
-  const { road, startM, lengthM } = site;
+  const { startM, lengthM } = site;
+  // Piers reach up to the road that clears what it crosses, not to the one proposed.
+  let road: RoadProfile | undefined;
   const roadLevel = (chainageM: number): number =>
-    road.startLevelM + ((road.endLevelM - road.startLevelM) * (chainageM - startM)) / lengthM;
+    roadLevelAt((road ??= profileOrNearest(site, constructionDepth(site.deck, ORDINARY_DEPTH_M))), chainageM);
   const sized = (chainageM: number, load: number): MeasuredLine[] => {
     const perM = PIER_LOADS_KN[load]! / PIER_SPAN_M;
     const deck = {
       permanentKNm: PIER_PERMANENT * perM,
       trafficKNm: (1 - PIER_PERMANENT) * perM,
-      depthM: PIER_DECK_DEPTH_M,
+      depthM: ORDINARY_DEPTH_M,
     };
     return expectedLines(
       standPierBetween(site, deck, chainageM, PIER_SPAN_M, PIER_SPAN_M, roadLevel(chainageM)),

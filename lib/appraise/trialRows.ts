@@ -2,6 +2,7 @@ import { formModule } from '../forms/index.ts';
 import type { Design, FormId, MeasuredLine, MethodId, Site } from '../model/index.ts';
 import { sideRatioWindow } from '../rules/index.ts';
 import { deckOnSupport } from '../substructure/index.ts';
+import { meanClearance } from './meanClearance.ts';
 import { methodLines } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
 import type { Kept } from '../kept.ts';
@@ -10,6 +11,7 @@ import { openSpans } from './openSpans.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { TrialRow } from './memory.ts';
 import type { Sizer } from './sizer.ts';
+import { tautSide } from './tautSide.ts';
 import { finish, type Work } from './work.ts';
 
 /** Governing spans at which each form is really sized; in between cost grows with a power of the span. */
@@ -92,6 +94,7 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     deck: site.deck,
     standard: site.standard,
     planRadiusM: site.planRadiusM ?? Infinity,
+    ...(formModule(form).ignoresHeight ? {} : { clearM: meanClearance(site) }),
   };
 
   const sized = (
@@ -100,7 +103,9 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     pylons: 1 | 2,
   ): { design: Design; perM: number; fixed: number } => {
     const unit = trialUnit(form, spanM, pylons);
-    const design = size({ ...base, depthM, ...unit });
+    const { clearM, ...task } = base;
+    const height = clearM === undefined ? {} : { clearUnderM: [clearM, ...unit.spansM.map(() => clearM)] };
+    const design = size({ ...task, ...height, depthM, ...unit });
     const lines = [...design.lines, ...methodLines([design])];
     const lengthM = unit.spansM.reduce((sum, span) => sum + span, 0);
     return {
@@ -139,7 +144,8 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
       share === 1 || kind !== 'continuous' ? whole.perM : sized(share * spanM, depthM, 1).perM,
     );
     yield;
-    const fixed = hung ? [whole.fixed, whole.fixed, sized(spanM, depthM, 2).fixed] : [whole.fixed];
+    const double = hung ? sized(spanM, depthM, 2) : null;
+    const fixed = double ? [whole.fixed, whole.fixed, double.fixed] : [whole.fixed];
     const { permanentKNm, trafficKNm } = deckOnSupport(whole.design);
     return {
       depthM,
@@ -147,6 +153,7 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
       perM,
       fixed,
       endWorksAs: endWork(permanentKNm, trafficKNm),
+      tautSide: double ? tautSide(double.design) : Infinity,
       loadKNm: permanentKNm + trafficKNm,
     };
   };

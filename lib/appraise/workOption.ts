@@ -10,19 +10,13 @@ import type {
   WorkedOption,
 } from '../model/index.ts';
 import { planProgramme } from '../programme/index.ts';
-import {
-  constructionDepth,
-  groundAt,
-  headroomSpare,
-  profileFor,
-  roadLevelAt,
-  type DepthAlong,
-} from '../site/index.ts';
+import { constructionDepth, groundAt, headroomSpare, roadLevelAt, type DepthAlong } from '../site/index.ts';
 import { expectedLines, placeText, standOneSupport, standSupports } from '../substructure/index.ts';
 import { measure } from '../takeoff/index.ts';
 import { remembered } from '../kept.ts';
 import type { DepthTrial } from './leastCostDepth.ts';
 import type { AtDepth } from './memory.ts';
+import { profileOrNearest } from './profileOrNearest.ts';
 import type { Workbench } from './workbench.ts';
 
 /** Spans of a unit, m. */
@@ -46,23 +40,6 @@ export function depthAlong(site: Site, units: readonly Unit[], designs: readonly
     });
   });
   return { xM, depthM };
-}
-
-/** The lowest road line that clears everything, or where there is none the line that misses it by least. */
-function profileOrNearest(site: Site, depth: DepthAlong | number): RoadProfile {
-  const found = profileFor(site, depth);
-  if (found.ok) return found.profile;
-  const { kind, missedBy } = found.refusal;
-  const eased: Site =
-    kind === 'clearance'
-      ? {
-          ...site,
-          soffitLimits: site.soffitLimits.map((l) => ({ ...l, levelM: l.levelM - missedBy - 1e-3 })),
-        }
-      : { ...site, road: { ...site.road, maxGradient: site.road.maxGradient + missedBy + 1e-6 } };
-  const again = profileFor(eased, depth);
-  if (!again.ok) throw new RangeError('road profile: expected a line once the limits are eased, found none');
-  return again.profile;
 }
 
 /** Depths are drawn to 50 mm: 20 steps to the metre. */
