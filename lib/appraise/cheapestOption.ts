@@ -10,8 +10,6 @@ import { depthsOf, mainUnit, spansOf, trialAt, workOptionAt, type Worked } from 
 const OVER_DECK_ALONE = 1.15;
 /** A variant has to save this share of the cost: the curve is flat and the choice must not jitter. */
 const PAYS = 0.01;
-/** A variant at the depth where it is first tried may be this much dearer and still have its own depth sought. */
-const PROMISES = 1.03;
 /** Midspan depth at which a variant is first tried over the best of constant depth. */
 const FIRST_TRY = { haunched: 0.9, substringers: 1.2, other: 1 } as const;
 
@@ -68,7 +66,8 @@ function* cheapestMade(bench: Workbench, plain: Made): Work<Made> {
   if (tried.length === 0) return plain;
   const best = tried.reduce((one, other) => (worth(other.trial) < worth(one.trial) ? other : one));
   if (typedM !== null) return isBetter(best.trial, plain.trial) ? best : plain;
-  if (!(worth(best.trial) < PROMISES * worth(plain.trial))) return plain;
+  // About the best depth cost is flat: what is dearer where it is first tried will not save what it must.
+  if (!(worth(best.trial) < worth(plain.trial))) return plain;
   const made = yield* atBestDepth(bench, best.option, best.depthM);
   return isBetter(made.trial, plain.trial) ? made : plain;
 }
