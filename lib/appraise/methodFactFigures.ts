@@ -1,4 +1,5 @@
 import type { At, Descriptor } from '../model/index.ts';
+import { girderLines } from '../takeoff/index.ts';
 import { asIs, fact, factOf } from './factFigure.ts';
 import { halfDeckNeeded } from './methodFacts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
@@ -21,11 +22,10 @@ const pieceMasses = (at: At): string[] =>
   );
 const ends = (at: At, kind: 'zones' | 'waters'): string[] =>
   at.appraisal.site[kind].flatMap((_, i) => [`site/${kind}/${i}/fromM`, `site/${kind}/${i}/toM`]);
-const linesPath = (at: At): string[] =>
-  ['girders', 'beamLines', 'boxes']
-    .filter((name) => at.option.designs[main(at)]!.figures[name] !== undefined)
-    .slice(0, 1)
-    .map((name) => `${at.root}/designs/${main(at)}/figures/${name}`);
+const linesPath = (at: At): string[] => {
+  const lines = girderLines(at.option.designs[main(at)]!);
+  return lines === undefined ? [] : [`${at.root}/designs/${main(at)}/figures/${lines.figure}`];
+};
 
 /** What the rules are told of methods: what can come to the site, and the traffic under the deck. */
 export const methodFactFigures: readonly Descriptor[] = [

@@ -1,5 +1,6 @@
 import type { Brief, DeckStrip, Design, Facts, Site, Unit, WorkedOption } from '../model/index.ts';
 import { headroomSpare } from '../site/index.ts';
+import { girderLines } from '../takeoff/index.ts';
 import { erectionData } from './erectionData.ts';
 import { launchYardNeeded } from './launchYardNeeded.ts';
 import { pickRadius } from './pickRadius.ts';
@@ -64,15 +65,14 @@ function plantFacts(site: Site, { method, units, designs }: WorkedOption, { acce
 
 /** What else the bridge is asked for: traffic beside the works, a gas main, a wider deck one day. */
 function demandFacts(site: Site, { units, designs }: WorkedOption, { demands, deck }: Brief): Known {
-  const { figures } = designs[units.indexOf(mainUnit(units))]!;
-  const lines = figures['girders'] ?? figures['beamLines'] ?? figures['boxes'];
+  const lines = girderLines(designs[units.indexOf(mainUnit(units))]!);
   return {
     lanesKept: demands.lanesKept,
     gasMain: demands.gasMain,
     halfDeckM: site.deck.widthM / 2,
     halfDeckNeededM: halfDeckNeeded(demands.lanesKept),
     wideningM: widening(deck),
-    ...(lines === undefined ? {} : { girderLines: lines }),
+    ...(lines === undefined ? {} : { girderLines: lines.count }),
   };
 }
 

@@ -1,4 +1,5 @@
 import { described, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
+import { girderLines } from './girderLines.ts';
 import { itemOf } from './items.ts';
 
 /** Where a line of an option was measured first: a unit, a support, or the crossing itself. */
@@ -49,6 +50,7 @@ function possession(at: At) {
   const middle = (Math.min(...of.map(({ fromM }) => fromM)) + Math.max(...of.map(({ toM }) => toM))) / 2;
   const over = at.option.units.findIndex(({ supportsM }) => middle <= supportsM.at(-1)!);
   const design = at.option.designs[over]!;
+  const lines = girderLines(design);
   const rule = `data/programme/methods/${design.task.method}/possessions`;
   const path = `${at.root}/designs/${over}`;
   return {
@@ -58,7 +60,7 @@ function possession(at: At) {
     from: stretches.map((one) => `${one}/fromM`),
     to: stretches.map((one) => `${one}/toM`),
     piece: design.heaviestPiece === null ? [] : [`${path}/heaviestPiece/lengthM`],
-    girders: design.task.girders === undefined ? [] : [`${path}/task/girders`],
+    girders: lines === undefined ? [] : [`${path}/figures/${lines.figure}`],
   };
 }
 

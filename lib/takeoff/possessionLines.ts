@@ -1,5 +1,9 @@
 import type { Design, MeasuredLine, Site, Support } from '../model/index.ts';
+import { girderLines } from './girderLines.ts';
 import { methodData } from './methodData.ts';
+
+/** Main members side by side of forms that do not count them: two trusses, two planes of stays. */
+const USUAL_LINES = 2;
 
 interface Stretch {
   readonly name: string;
@@ -71,6 +75,6 @@ function designOver(
 function piecesOver(design: Design, lengthM: number): number {
   const piece = design.heaviestPiece?.lengthM;
   if (piece === undefined || !(piece > 0)) return 0;
-  const girders = design.task.girders ?? 2;
-  return girders * Math.ceil(lengthM / piece);
+  const lines = girderLines(design)?.count ?? USUAL_LINES;
+  return lines * Math.ceil(lengthM / piece);
 }

@@ -3,7 +3,14 @@ import type { MeasuredLine, Site } from '../../lib/model/index.ts';
 import { proposedProfile } from '../../lib/site/index.ts';
 import { substructureData } from '../../lib/substructure/data.ts';
 import { standSupports } from '../../lib/substructure/index.ts';
-import { items, measure, perM2, quantitiesOf, splitQuantities } from '../../lib/takeoff/index.ts';
+import {
+  items,
+  measure,
+  perM2,
+  quantitiesOf,
+  splitQuantities,
+  girderLines,
+} from '../../lib/takeoff/index.ts';
 import { crossing, plainDesign, profile, steelLine, unitOn } from '../substructure/crossing.ts';
 
 const units = [unitOn([0, 60]), unitOn([60, 140, 200])];
@@ -67,6 +74,12 @@ it('measure(railway) counts possessions by method and pieces over the track', ()
   // Crane: 2 and half of 2 girders x ceil(22 m / 25 m) pieces.
   expect(sum(measured(rail), 'rail-possession')).toBe(3);
   expect(sum(measured(), 'rail-possession')).toBe(0);
+});
+
+it('girderLines(design) counts girders, beams or boxes, whichever its form has', () => {
+  expect(girderLines({ figures: { girders: 5, spacingM: 3 } })).toEqual({ figure: 'girders', count: 5 });
+  expect(girderLines({ figures: { beamLines: 7 } })!.count).toBe(7);
+  expect(girderLines({ figures: { cells: 2 } })).toBeUndefined();
 });
 
 it('measure(crossing) leaves foundations to the ground class drawn', () => {
