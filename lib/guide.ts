@@ -127,7 +127,7 @@ function outsideUsual(form: FormId, spanM: number): Pick<Ruling, 'because' | 'so
   );
   return {
     because: [
-      `${spanM} m is outside the usual ${usual[0]} to ${usual[1]} m, within the limits of ${possible[0]} and ${possible[1]} m`,
+      `${Number(spanM.toFixed(1))} m is outside the usual ${usual[0]} to ${usual[1]} m, within the limits of ${possible[0]} and ${possible[1]} m`,
     ],
     source: usualRule === undefined ? '' : cite(usualRule.sources),
   };

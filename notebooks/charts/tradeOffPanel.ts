@@ -113,7 +113,9 @@ export function panel(
     x: axis.x(spread(option).p50),
     y: y(option.cost.p50),
   }));
-  const offs = standOff(places, input.reference, right, input.budget === null ? null : y(input.budget), {
+  const offs = standOff(places, input.reference, input.budget === null ? null : y(input.budget), {
+    left,
+    right,
     // Clear of the name of the panel.
     top: top + 8,
     bottom,

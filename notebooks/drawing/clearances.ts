@@ -96,6 +96,7 @@ function envelopePiece(
   { words: spare, figure }: Spare,
   accent: string,
   room: Placer,
+  isBare: boolean,
 ): Piece {
   const left = frame.x(one.fromM);
   const right = frame.x(one.toM);
@@ -116,6 +117,7 @@ function envelopePiece(
     stroke: accent,
     'stroke-width': pens.medium,
   });
+  if (isBare) return outline;
   const headroom = (one.topLevelM - one.footLevelM).toFixed(2);
   const inside = `${length(one.toM - one.fromM)} × ${headroom}`;
   room.takeLine(
@@ -177,7 +179,7 @@ function envelopePiece(
   );
 }
 
-/** Outline of each envelope in the accent with its headroom; over a railway the upper corners are cut. */
+/** Outline of each envelope in the accent with its headroom, unless it is to be bare; over a railway the upper corners are cut. */
 export function clearances(
   site: Site,
   option: AppraisedOption | null,
@@ -185,10 +187,11 @@ export function clearances(
   list: readonly Envelope[],
   accent: string,
   room: Placer,
+  isBare = false,
 ): Piece {
   return g(
     { class: 'clearances' },
-    list.map((one) => envelopePiece(frame, one, spareOver(site, option, one), accent, room)),
+    list.map((one) => envelopePiece(frame, one, spareOver(site, option, one), accent, room, isBare)),
   );
 }
 

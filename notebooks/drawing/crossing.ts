@@ -163,11 +163,13 @@ export function crossing(input: CrossingInput): Piece {
     (one) => one.toM > shown.fromM && one.fromM < shown.toM,
   );
   const barred = small ? null : barredPiece(site, option, list, room);
-  const marked = small ? null : clearances(site, option, frame, list, ink.accent, room.placer);
+  const marked = small ? null : clearances(site, option, frame, list, ink.accent, room.placer, widthPx < 480);
   const depths = option === null || small ? [] : depthMarks(site, option, room);
-  const levels = small ? [] : levelMarks(site, input.obstacles, room);
+  // On a hand-held screen lettering of levels and founding would touch.
+  const cramped = small || widthPx < 480;
+  const levels = cramped ? [] : levelMarks(site, input.obstacles, room);
   const named = names(site, room);
-  const below = small ? [] : belowGround(site, option, room, range.bottomM);
+  const below = cramped ? [] : belowGround(site, option, room, range.bottomM);
 
   const chainages = option === null ? [site.startM, site.endM] : supportChainages(option);
   const inside = chainages.filter((at) => at >= shown.fromM - 1e-6 && at <= shown.toM + 1e-6);

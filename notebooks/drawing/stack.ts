@@ -20,8 +20,13 @@ export function stackChainage(site: Site, widthPx: number, asked?: Scale) {
   const narrow = widthPx < narrowBelow;
   const costPx = narrow ? 0 : Math.min(244, Math.max(200, widthPx * 0.2));
   const bodyPx = widthPx - costPx;
-  const scale = asked ?? crossingScale(site, bodyPx, narrow ? 2 : 16);
-  return { narrow, bodyPx, scale, shown: chainagesShown(site, bodyPx, scale) } as const;
+  const beside = asked ?? crossingScale(site, bodyPx, narrow ? 2 : 16);
+  // Long crossings take the whole width, under their costs, where that gains a scale.
+  const whole = asked ?? crossingScale(site, widthPx, 16);
+  const isTall = !narrow && beside >= 5000 && whole < beside;
+  const scale = isTall ? whole : beside;
+  const drawnPx = isTall ? widthPx : bodyPx;
+  return { narrow, bodyPx, drawnPx, isTall, scale, shown: chainagesShown(site, drawnPx, scale) } as const;
 }
 
 /** What all rows share, and the width of the elevations. */
@@ -35,7 +40,7 @@ function layOut(input: StackInput): {
     input.options.flatMap((option) => option.units.map((unit) => unit.form)),
     input.prefix ?? 'stack',
   );
-  const { narrow, bodyPx, scale, shown } = stackChainage(input.site, input.widthPx, input.scale);
+  const { narrow, bodyPx, isTall, scale, shown } = stackChainage(input.site, input.widthPx, input.scale);
   const largest = Math.max(0, ...input.options.map((option) => option.cost.p90));
   const values = spreadValues(
     input.options.map((option) => option.cost),
@@ -46,6 +51,7 @@ function layOut(input: StackInput): {
     ink,
     scale,
     shown,
+    isTall,
     axis: narrow
       ? linearAxis(values, 4, input.widthPx - 4)
       : // Right of the prices per m2, so that the line of the budget does not run through them.

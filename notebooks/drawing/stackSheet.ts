@@ -45,6 +45,8 @@ export interface StackSheet {
   readonly ink: FormInk;
   readonly scale: Scale;
   readonly shown: { readonly fromM: number; readonly toM: number };
+  /** Elevations stand under their costs and take the whole width. */
+  readonly isTall: boolean;
   readonly axis: Axis;
   readonly unit: { readonly per: number; readonly label: string };
 }

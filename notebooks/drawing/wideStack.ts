@@ -123,8 +123,12 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
   const { site } = input;
   const range = levelRange(site, option, scale < 2000);
   const titleY = top + 23;
-  const frame = frameOf(scale, shared.shown, 0, { levelM: range.topM, y: titleY + 12 });
-  const dimensionY = Math.max(frame.y(range.bottomM) + 6, titleY + 70);
+  const { isTall } = shared;
+  const frame = frameOf(scale, shared.shown, 0, {
+    levelM: range.topM,
+    y: titleY + (isTall ? COST_PX : 12),
+  });
+  const dimensionY = Math.max(frame.y(range.bottomM) + (isTall ? 14 : 6), titleY + 70);
   const bottom = dimensionY + 12;
   const chainages = supportChainages(option);
   const spans = spansOf(option);
@@ -138,7 +142,7 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
     if (textWidth(whole, letters.table) + 6 < span * frame.pxPerM) return whole;
     return textWidth(figure, 11) + 3 < span * frame.pxPerM || span * frame.pxPerM > 26 ? figure : '';
   };
-  const figureY = Math.max(deckY + 10, titleY + 24);
+  const figureY = isTall ? titleY : Math.min(Math.max(deckY + 10, titleY + 24), bottom - 42);
   const drawn = [
     title(shared, option, titleY, bodyPx),
     elevationBody(site, option, frame, ink, range, { plain: scale >= 2000 }),
@@ -149,7 +153,8 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
       colour: colours.ink,
       asked: spanPaths(option),
     }),
-    figures(shared, option, bodyPx + 22, input.widthPx, Math.min(figureY, bottom - 42)),
+    figures(shared, option, bodyPx + 22, input.widthPx, figureY),
+    isTall && budgetLine(shared, figureY - 16, figureY + 26, false),
     barredPiers(site, option, frame, ink.accent),
     hands !== undefined && pierFeet(option, frame, dimensionY, hands.locked),
     hands !== undefined && freeBar(site, option, frame, dimensionY + 8, hands.hold),
@@ -206,6 +211,9 @@ function budgetLine(shared: StackSheet, top: number, bottom: number, words: bool
   );
 }
 
+/** From the name of an option down to its elevation where its costs stand over that, px. */
+const COST_PX = 46;
+
 /** Room over the first row for brackets and axis, and under the last for the scale bar, px. */
 export const stackHead = 46;
 export const stackFoot = 40;
@@ -240,7 +248,7 @@ export function wideStack(shared: StackSheet, bodyPx: number): Piece {
         barredWash(site, first, head - 12, bottom),
         barredBrackets(site, first, head - 18, ink.accent),
         axisHead(shared, head - 6, input.widthPx),
-        budgetLine(shared, head - 18, bottom, true),
+        budgetLine(shared, head - 18, shared.isTall ? head - 2 : bottom, true),
         rows.map(
           ({ bottom: at }, index) =>
             index < rows.length - 1 &&

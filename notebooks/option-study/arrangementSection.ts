@@ -134,7 +134,7 @@ export function arrangementSection(
       wide: true,
       body: (v, room) => {
         if (!v.reference) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
-        const { bodyPx: widthPx, scale, shown } = stackChainage(v.site, room.widthPx);
+        const { drawnPx: widthPx, scale, shown } = stackChainage(v.site, room.widthPx);
         return [
           roadProfile({ site: v.site, option: v.reference, widthPx, scale, shown, prefix: 'road' }),
           tableBehind(roadTable(v.reference)),

@@ -1,3 +1,5 @@
+import { options } from './fixture.ts';
+import { standOff } from '../../notebooks/charts/standOff.ts';
 import { describe, expect, it } from 'vitest';
 import { dominatedSide, edgeOf, undominated } from '../../notebooks/charts/edge.ts';
 import { flatStretch } from '../../notebooks/charts/depthCurve.ts';
@@ -25,6 +27,35 @@ import { formLooks } from '../../notebooks/forms/formLook.ts';
 import { tint } from '../../notebooks/forms/formInk.ts';
 import { contrast } from '../../notebooks/forms/optionNumber.ts';
 import { formIds } from '../../lib/model/index.ts';
+
+describe('standOff(places, reference, limitY, panel)', () => {
+  it('keeps the numbers of two dozen marks in one spot apart, in the panel, off the limit and in their order', () => {
+    const panel = { left: 0, right: 360, top: 40, bottom: 362 };
+    const places = Array.from({ length: 24 }, (_, i) => ({
+      option: { ...options[0]!, number: i + 1 },
+      x: 100 + (i % 5) * 4,
+      y: 120 + i * 7,
+    }));
+    const stands = [...standOff(places, null, 200, panel)];
+    expect(stands).toHaveLength(24);
+    for (const [number, { x, y }] of stands) {
+      expect(x).toBeGreaterThanOrEqual(panel.left + 12);
+      expect(x).toBeLessThanOrEqual(panel.right - 12);
+      expect(y).toBeGreaterThanOrEqual(panel.top + 12);
+      expect(y).toBeLessThanOrEqual(panel.bottom - 12);
+      expect(Math.abs(y - 200)).toBeGreaterThanOrEqual(13);
+      for (const [other, at] of stands)
+        if (other !== number) expect(Math.hypot(at.x - x, at.y - y)).toBeGreaterThanOrEqual(22);
+    }
+    for (const column of new Set(stands.map(([, { x }]) => x))) {
+      const down = stands
+        .filter(([, { x }]) => x === column)
+        .toSorted(([, a], [, b]) => a.y - b.y)
+        .map(([number]) => number);
+      expect(down).toEqual(down.toSorted((a, b) => a - b));
+    }
+  });
+});
 
 describe('figures as printed', () => {
   it('fixed(value, places) puts thin spaces into thousands and a true minus in front', () => {

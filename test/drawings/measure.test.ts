@@ -14,7 +14,7 @@ import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { plan } from '../../notebooks/drawing/plan.ts';
 import { section } from '../../notebooks/drawing/section.ts';
 import { roadProfile } from '../../notebooks/drawing/roadProfile.ts';
-import { stackChainage } from '../../notebooks/drawing/stack.ts';
+import { stack, stackChainage } from '../../notebooks/drawing/stack.ts';
 import { mainDesign } from '../../notebooks/drawing/sectionRow.ts';
 import { toSvgFile } from '../../notebooks/drawing/toText.ts';
 import { expectGolden } from './golden.ts';
@@ -22,10 +22,20 @@ import { crossedBy, example, type Crossed } from './measuring/crossings.ts';
 import { measureElevation } from './measuring/elevationMarks.ts';
 import { chainagesOf, measureOption, near, READING_PX, spareWorkedOut } from './measuring/measureOption.ts';
 import { measureUnits } from './measuring/measureUnits.ts';
-import { levelMarksOf, readPaper } from './measuring/paper.ts';
+import { levelMarksOf, readPaper, saidScale } from './measuring/paper.ts';
 import { stripsDrawn } from './measuring/sectionMarks.ts';
 import { depthOf } from './measuring/workedDepth.ts';
-import { crossedAt, having, parts, printed, readSvg, runsOf, within, type Node } from './measuring/svg.ts';
+import {
+  boxOf,
+  crossedAt,
+  having,
+  parts,
+  printed,
+  readSvg,
+  runsOf,
+  within,
+  type Node,
+} from './measuring/svg.ts';
 
 const file = (piece: Piece): Node => readSvg(toSvgFile(piece));
 const wordsOf = (svg: Node): string[] =>
@@ -212,7 +222,7 @@ describe('roadProfile(input), measured', { timeout: 120_000 }, () => {
   it.each(exampleNames)('says how heights are exaggerated, and gives back road and needs of %s', (name) => {
     const { site, options } = example(name).appraisal;
     for (const option of options) {
-      const { bodyPx: widthPx, scale, shown } = stackChainage(site, 1224);
+      const { drawnPx: widthPx, scale, shown } = stackChainage(site, 1224);
       const svg = file(roadProfile({ site, option, widthPx, scale, shown }));
       const said = wordsOf(svg).flatMap((text) => /^heights × (\d+)$/u.exec(text)?.[1] ?? []);
       const times = Number(said[0] ?? 1);
@@ -251,14 +261,46 @@ describe('roadProfile(input), measured', { timeout: 120_000 }, () => {
   });
 });
 
+describe('stack(input) of a long crossing', { timeout: 120_000 }, () => {
+  it('draws its elevations over the whole width at 1:5000, each under its cost, and says so', () => {
+    const { site, options, standing } = example('sarrow-estuary').appraisal;
+    const drawing = stack({
+      site,
+      options,
+      standing,
+      budget: null,
+      currency: 'EUR',
+      reference: null,
+      widthPx: 1224,
+    });
+    const svg = file(drawing);
+    expect(stackChainage(site, 1224)).toMatchObject({ isTall: true, scale: 5000, drawnPx: 1224 });
+    expect(saidScale(svg).scale).toBe(5000);
+    const bodies = having(svg, 'class', 'elevation');
+    expect(bodies).toHaveLength(options.length);
+    for (const [i, body] of bodies.entries()) {
+      const [road] = parts(body, 'road').map(boxOf);
+      expect(road!.right - road!.left).toBeCloseTo(site.lengthM * saidScale(svg).pxPerM, 1);
+      const row = having(svg, 'data-option')[i]!;
+      const cost = having(row, 'class', 'figures')[0]!;
+      const lowest = Math.max(
+        ...[...within(cost)].filter(({ tag }) => tag === 'text').map(({ attrs }) => Number(attrs['y'])),
+      );
+      const decks = having(body, 'data-form').flatMap((unit) => having(unit, 'data-part'));
+      const beside = decks.map(boxOf).filter(({ right }) => right > 980);
+      expect(Math.min(...beside.map(({ top }) => top))).toBeGreaterThan(lowest);
+    }
+  });
+});
+
 describe('golden drawings of the examples', { timeout: 120_000 }, () => {
   const sheetsOf = (name: ExampleName): Record<string, () => Piece> => {
     const { appraisal, study } = example(name);
     const { site, options, standing } = appraisal;
     const option = options.find(({ number }) => number === (study.options.reference ?? standing.leader))!;
     const widthPx = wantsWidth(site) ? 1224 : 980;
-    const { bodyPx, scale, shown } = stackChainage(site, 1224);
-    const onChainage = { widthPx: bodyPx, scale, shown };
+    const { drawnPx, scale, shown } = stackChainage(site, 1224);
+    const onChainage = { widthPx: drawnPx, scale, shown };
     return {
       crossing: () => crossing({ site, option, obstacles: study.brief.obstacles, widthPx }),
       plan: () => plan({ site, option, widthPx, bar: true }),
