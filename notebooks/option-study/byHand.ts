@@ -4,7 +4,7 @@ import { optionTitle } from '../drawing/optionWords.ts';
 import { level } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { StudyStore } from '../page/index.ts';
-import { released, withDepth, withLock } from './handEdits.ts';
+import { released, withDepth, withLock, withVariant } from './handEdits.ts';
 
 const action = (words: string, key: string, act: () => void, name = words): HTMLElement =>
   h(
@@ -53,9 +53,28 @@ export function byHand(
         action('Depth of least cost', 'depth.free', () =>
           store.edit((study) => withDepth(study, option, null), { what: 'freeing the depth' }),
         ),
+      made(option, kept, store),
       locks,
     ]),
   ];
+}
+
+/** Where an option is not made plainly, to have it plain; where that was chosen by hand, to leave it to least cost again. */
+function made(option: AppraisedOption, kept: KeptOption | undefined, store: StudyStore): HtmlChild {
+  if (kept?.variant !== undefined)
+    return action('Made as costs least', 'made.free', () =>
+      store.edit((study) => withVariant(study, option, null), { what: 'freeing how it is made' }),
+    );
+  const { variant = {} } = option;
+  if (Object.keys(variant).length === 0) return false;
+  const without = [
+    ...(variant.haunchRatio === undefined ? [] : ['haunch']),
+    ...(variant.substringers ? ['substringers'] : []),
+    ...(variant.transverse ? ['tendons across'] : []),
+  ].join(' and ');
+  return action(`Make it without ${without}`, 'made.plain', () =>
+    store.edit((study) => withVariant(study, option, {}), { what: `leaving out ${without}` }),
+  );
 }
 
 const giveBack = ({ number }: KeptOption, store: StudyStore): HTMLElement =>

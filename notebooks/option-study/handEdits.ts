@@ -1,4 +1,4 @@
-import type { AppraisedOption, KeptOption, Study, Unit } from '../../lib/index.ts';
+import type { AppraisedOption, KeptOption, Study, Unit, Variant } from '../../lib/index.ts';
 import { fixed } from '../format.ts';
 import { supportName } from '../drawing/alongOption.ts';
 import { putAt } from '../page/place.ts';
@@ -89,6 +89,12 @@ export function withSpan(study: Study, option: AppraisedOption, span: number, le
 /** The study with the depth of an option typed, m; null leaves it to least cost again. */
 export const withDepth = (study: Study, option: AppraisedOption, depthM: number | null): Study =>
   withKept(study, { ...keptOf(study, option), depthM });
+
+/** The study with the way an option is made chosen by hand; null leaves it to least cost again. */
+export function withVariant(study: Study, option: AppraisedOption, variant: Variant | null): Study {
+  const { variant: _before, ...kept } = keptOf(study, option);
+  return withKept(study, { ...kept, ...(variant !== null && { variant }) });
+}
 
 /** The study with a pier of an option locked or freed. */
 export function withLock(study: Study, option: AppraisedOption, index: number, isLocked: boolean): Study {

@@ -9,6 +9,7 @@ import {
   withObstacleEdge,
   withPier,
   withSpan,
+  withVariant,
 } from '../../notebooks/option-study/handEdits.ts';
 import { workedStudy } from './study.ts';
 
@@ -47,6 +48,17 @@ describe('withPier(study, option, index, chainageM)', () => {
     );
     const read = readStudy(writeStudy(study));
     expect(read.ok && read.value.options.kept).toEqual(study.options.kept);
+  });
+
+  it('has the way it is made chosen by hand, kept in the file, and left to least cost again', () => {
+    const chosen = withVariant(numbered, option, { haunchRatio: 1.6 });
+    const read = readStudy(writeStudy(chosen));
+    expect(read.ok && read.value.options.kept[0]!.variant).toEqual({ haunchRatio: 1.6 });
+    const mine = appraise(chosen, kept).options.find(({ number }) => number === option.number)!;
+    expect(mine.variant).toEqual({ haunchRatio: 1.6 });
+    expect(mine.depthM.support).toBeGreaterThan(1.5 * mine.depthM.midspan);
+    const freed = withVariant(chosen, option, null);
+    expect('variant' in freed.options.kept[0]!).toBe(false);
   });
 
   it('is worked out under its number, and gives back the proposal when it is released', () => {
