@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { requestFor } from '../../lib/appraise/requestFor.ts';
+import { patternOf, requestFor } from '../../lib/appraise/requestFor.ts';
 import { formModule, sizeableForms } from '../../lib/forms/index.ts';
 import { survey } from '../../lib/site/index.ts';
 import { lowFerry } from './studies.ts';
@@ -20,4 +20,20 @@ describe('requestFor', () => {
       expect(request.windows.endRatio !== undefined).toBe(pattern.kind === 'continuous' && !single);
     },
   );
+});
+
+describe('patternOf', () => {
+  const main = { form: 'cantilever-box', role: 'main', supportsM: [100, 160, 260, 320] } as const;
+
+  it.each(['concrete-box', 'composite-i'] as const)(
+    'patternOf(box cantilever with approaches of %s) is the pattern with such approaches',
+    (form) => {
+      const before = { form, role: 'approach', supportsM: [0, 50, 100] } as const;
+      expect(patternOf('cantilever-box', [before, main])).toMatchObject({ kind: 'flanked', approach: form });
+    },
+  );
+
+  it('patternOf(one unit) is the pattern of the form itself', () => {
+    expect(patternOf('cantilever-box', [main])).toEqual(formModule('cantilever-box').pattern);
+  });
 });
