@@ -50,6 +50,8 @@ export interface Articulation {
   /** Design vertical load of all bearings together, MN. */
   readonly bearingMN: number;
   readonly alongKN: number;
+  /** Moment along the road that it takes while the deck is cantilevered from it, kNm; absent where none is. */
+  readonly buildingKNm?: number;
   readonly acrossKN: number;
   /** Movement of the expansion joint here, mm; 0 where the deck is continuous. */
   readonly jointMovementMm: number;

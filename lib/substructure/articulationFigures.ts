@@ -140,6 +140,15 @@ export const articulationFigures: readonly Descriptor[] = [
     sources: ['AASHTO LRFD 3.14.8 (from memory)'],
   }),
   described({
+    path: support('articulation/buildingKNm'),
+    label: on('moment while the deck is cantilevered from it'),
+    unit: 'kNm',
+    method: 'as sized',
+    formula: 'one arm a segment and its traveller ahead, and heavier by a share of its weight',
+    inputs: (at) => ({ unbalanced: unitsAt(at).map(({ path }) => `${path}/figures/unbalancedMomentKNm`) }),
+    compute: ({ unbalanced }) => Math.max(...unbalanced),
+  }),
+  described({
     path: support('articulation/bearings'),
     label: on('bearings'),
     unit: 'no',

@@ -34,6 +34,8 @@ const loads = (at: At) =>
     along: `${at.foot}/articulation/alongKN`,
     across: `${at.foot}/articulation/acrossKN`,
     height: `${at.foot}/heightM`,
+    building:
+      at.support.articulation.buildingKNm === undefined ? [] : [`${at.foot}/articulation/buildingKNm`],
     struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],
     earthquake: at.appraisal.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
     shaft: [`${at.foot}/shaft/lengthM`, `${at.foot}/shaft/widthM`],

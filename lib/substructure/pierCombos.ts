@@ -10,7 +10,7 @@ export const accidentalCapacity = 1.5;
 
 /**
  * Combinations of loads at the bearings of a pier or pylon: traffic with braking or friction and part of the wind;
- * wind without traffic; uplift where there is any; a vehicle, train or vessel striking the shaft where one can; an earthquake.
+ * wind without traffic; one arm ahead of the other where a deck is cantilevered from it; uplift where there is any; a vehicle, train or vessel striking the shaft where one can; an earthquake.
  * `windKN` at `windLevelM` is the wind on the shaft itself; `ownKN` its weight.
  */
 export function pierCombos(
@@ -47,6 +47,18 @@ export function pierCombos(
       ultimate: factors.wind,
     },
   ];
+  if (ask.building) {
+    combos.push({
+      verticalKN: ask.building.verticalKN + own.weightKN,
+      alongKN: 0,
+      alongLevelM: bearingLevelM,
+      momentAlongKNm: ask.building.momentKNm,
+      acrossKN: 0,
+      acrossLevelM: bearingLevelM,
+      capacity: 1,
+      ultimate: factors.permanent,
+    });
+  }
   const uplift = upliftKN(ask);
   if (uplift > 0) {
     const none = { alongKN: 0, alongLevelM: bearingLevelM, acrossKN: 0, acrossLevelM: bearingLevelM };

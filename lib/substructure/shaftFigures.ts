@@ -36,6 +36,8 @@ const pierInputs = (at: At) =>
     design: `${at.foot}/articulation/bearingMN`,
     along: `${at.foot}/articulation/alongKN`,
     across: `${at.foot}/articulation/acrossKN`,
+    building:
+      at.support.articulation.buildingKNm === undefined ? [] : [`${at.foot}/articulation/buildingKNm`],
     struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],
     earthquake: at.appraisal.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
     stress: pier('axialShare'),

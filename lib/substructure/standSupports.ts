@@ -62,6 +62,21 @@ export function standSupports(
   });
 }
 
+/** What an inner pier of a unit that is cantilevered from it takes until its arms are joined: the bare deck, out of balance. */
+function builtFrom(
+  site: Site,
+  meetings: readonly Meeting[],
+  permanentKN: number,
+): SupportAsk['building'] | null {
+  const [only] = meetings;
+  if (only === undefined || meetings.length > 1) return null;
+  const { task, figures } = only.design;
+  const momentKNm = figures['unbalancedMomentKNm'] ?? 0;
+  if (!(momentKNm > 0)) return null;
+  const tributaryM = (task.spansM[only.at - 1]! + task.spansM[only.at]!) / 2;
+  return { momentKNm, verticalKN: Math.max(0, permanentKN - site.deck.superimposedKNm * tributaryM) };
+}
+
 /** An abutment with the deck cast into it. */
 const withoutJoint = (ask: SupportAsk): SupportAsk => ({
   ...ask,
@@ -97,6 +112,7 @@ function askAt(
   const kind = end ? 'abutment' : carrier ? 'pylon' : upliftKN(loads) > 0 ? 'anchor-pier' : 'pier';
   const word = { abutment: 'abutment', pier: 'pier', pylon: 'pylon', 'anchor-pier': 'anchor pier' }[kind];
   const fixed = meetings.filter(({ hold }) => hold.fixed);
+  const building = end ? null : builtFrom(site, meetings, loads.permanentKN);
   return {
     name: end ? `${index === 0 ? 'start' : 'end'} ${word}` : `${word} ${index}`,
     index,
@@ -118,6 +134,7 @@ function askAt(
     bearings: integral ? 0 : meetings.length * substructureData.bearings.perLine,
     jointMovementMm: joint ? meetings.reduce((sum, { hold }) => sum + hold.movementMm, 0) : 0,
     ...pylon,
+    ...(building ? { building } : {}),
     ...(integral ? { integral } : {}),
   };
 }

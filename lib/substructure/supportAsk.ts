@@ -16,6 +16,8 @@ export interface SupportAsk {
   readonly trafficKN: number;
   /** Least traffic reaction; negative = uplift. */
   readonly trafficLeastKN: number;
+  /** While its arms stand free: moment of one arm ahead of the other, kNm, and what it carries then, kN. */
+  readonly building?: { readonly momentKNm: number; readonly verticalKN: number };
   /** Along the road at bearing level: braking and friction, or friction of a sliding bearing. */
   readonly alongKN: number;
   /** Wind across at deck level, without traffic. */

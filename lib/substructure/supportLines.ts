@@ -46,6 +46,7 @@ export function articulationOf(
     tieDownKN: upliftKN(ask),
     ...(ask.bearings > 0 ? { bearingKind: bearingKind(ask.bearingMovementMm, bearingMN, ask.bearings) } : {}),
     ...(vesselKN === null ? {} : { vesselKN }),
+    ...(ask.building ? { buildingKNm: ask.building.momentKNm } : {}),
   };
 }
 
