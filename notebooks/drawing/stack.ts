@@ -73,10 +73,11 @@ export function stack(input: StackInput): Piece {
 /**
  * The stack in parts no higher than a page, on the same scales, for printing; the width must be that of a full sheet.
  * @param heightPx room on a page; 960 on A3 landscape
+ * @param firstPx room on the page on which it begins, under what stands there already
  */
-export function stackOnPaper(input: StackInput, heightPx = 960): Piece[] {
+export function stackOnPaper(input: StackInput, heightPx = 960, firstPx = heightPx): Piece[] {
   const { shared, bodyPx } = layOut(input);
-  const room = heightPx - stackHead - stackFoot;
+  const roomOn = (page: number): number => (page === 0 ? firstPx : heightPx) - stackHead - stackFoot;
   const parts: AppraisedOption[][] = [];
   let left = 0;
   for (const option of input.options) {
@@ -84,7 +85,7 @@ export function stackOnPaper(input: StackInput, heightPx = 960): Piece[] {
     const last = parts[parts.length - 1];
     if (last === undefined || height > left) {
       parts.push([option]);
-      left = room - height;
+      left = roomOn(parts.length - 1) - height;
     } else {
       last.push(option);
       left -= height;

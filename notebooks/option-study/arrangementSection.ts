@@ -89,7 +89,8 @@ export function arrangementSection(
         widthPx: room.widthPx,
         prefix: 'stack',
       };
-      if (room.isPaper) return stackOnPaper(input).map((part) => h('div', { class: 'part' }, part));
+      if (room.isPaper)
+        return stackOnPaper(input, 960, FIRST_SHEET_PX).map((part) => h('div', { class: 'part' }, part));
       const { appraisal: of } = v.stacked;
       return [
         stack({ ...input, hands: v.hands }),
@@ -178,6 +179,9 @@ export function arrangementSection(
     }),
   ]);
 }
+
+/** Room for the stack on the printed sheet that begins the section, under its heading and first two cells, px. */
+const FIRST_SHEET_PX = 720;
 
 /** Ground shown on either side of the main opening, m. */
 const BESIDE_OPENING_M = 25;

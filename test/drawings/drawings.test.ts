@@ -200,6 +200,19 @@ describe('stackOnPaper(input, height)', () => {
   });
 });
 
+describe('stackOnPaper(input, height, first)', () => {
+  it('leaves room on its first page for what stands there', () => {
+    const input = { site, options, standing, budget, currency: 'EUR', reference: 2, widthPx: 1224 };
+    const [first, ...others] = stackOnPaper(input, 960, 500);
+    expect(Number(first!.attrs['height'])).toBeLessThanOrEqual(500);
+    for (const part of others) expect(Number(part.attrs['height'])).toBeLessThanOrEqual(960);
+    const rows = [first!, ...others].flatMap((part) =>
+      [...elements(part)].flatMap(({ attrs }) => attrs['data-option'] ?? []),
+    );
+    expect(rows).toEqual(['1', '2', '3', '4', '5', '6']);
+  });
+});
+
 describe('ranking(input)', () => {
   it('gives differences from the reference and says what cannot be separated', () => {
     const text = toText(
