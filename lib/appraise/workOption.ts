@@ -106,6 +106,9 @@ function standing(
   );
 }
 
+/** Depths that differ by less are one, m. */
+const SAME_DEPTH_M = 1e-9;
+
 /** An option at given depths of its units, m: designs, road, supports, quantities and months. */
 function workAt(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
   const { site, size } = bench;
@@ -117,7 +120,10 @@ function workAt(bench: Workbench, option: Option, depthsM: readonly number[]): A
   };
   const before = profileOrNearest(site, guess);
   const designs = units.map((unit, k) => size(taskOf(bench, option, unit, depthsM[k]!, before)));
-  const profile = profileOrNearest(site, depthAlong(site, units, designs));
+  const isAsDeep = designs.every(({ depthAlong: { depthM } }, k) =>
+    depthM.every((d) => Math.abs(d - depthsM[k]!) < SAME_DEPTH_M),
+  );
+  const profile = isAsDeep ? before : profileOrNearest(site, depthAlong(site, units, designs));
   const supports = standing(bench, units, designs, profile);
   const programme = planProgramme(site, designs, supports);
   const lines = [...measure(site, designs, supports, profile), ...programme.lines];

@@ -26,7 +26,7 @@ export interface ProfileRefusal {
   readonly chainageM: number | null;
   /** By how much: metres of headroom or depth; for a gradient its excess as a ratio. */
   readonly missedBy: number;
-  /** Rise of the free ends, m, with which a line would fit; null when no rise helps. */
+  /** Rise of the free ends, m, with which a line would fit; null when no rise helps. Looked for when it is read. */
   readonly riseNeededM: number | null;
 }
 
@@ -108,7 +108,9 @@ function gradientRefusal(site: Site): ProfileRefusal {
     limit: null,
     chainageM: null,
     missedBy: gradient - site.road.maxGradient,
-    riseNeededM: smallest(gradient * site.lengthM, (rise) => fitsWith(site, [], rise, 0)),
+    get riseNeededM() {
+      return smallest(gradient * site.lengthM, (rise) => fitsWith(site, [], rise, 0));
+    },
   };
 }
 
@@ -126,7 +128,9 @@ function refusal(site: Site, needs: readonly Need[]): ProfileRefusal {
     limit: tightest.limit,
     chainageM: tightest.chainageM,
     missedBy,
-    riseNeededM: smallest(rise + 10 * (height + 1), (r) => fitsWith(site, needs, r, 0)),
+    get riseNeededM() {
+      return smallest(rise + 10 * (height + 1), (r) => fitsWith(site, needs, r, 0));
+    },
   };
 }
 
