@@ -70,17 +70,21 @@ export function keeping(spec: KeepingSpec): Keeping {
       return;
     }
     revision = result.value.revision;
+    // Given up meanwhile: what waits and what is said belong to the tab that has it now.
+    if (!own.isMine()) return;
     // What has changed while it was saved starts from this revision.
     if (hasChanged()) write();
     else journal.clear(mine);
     spec.saved(result.value.savedAt);
   };
-  /** One saving after the other. */
-  const save = (): Promise<void> => (last = last.then(saveNow));
+  /** One saving after the other, also after one that failed. */
+  const save = (): Promise<void> => (last = last.then(saveNow, saveNow));
 
   const allow = (may: boolean): void => {
     mayChange = may;
     spec.owned(may);
+    // What was changed before the study was this tab's could not be saved yet.
+    if (may && isDirty) void save();
   };
 
   /** What the tab that had the study has left. */
@@ -92,7 +96,6 @@ export function keeping(spec: KeepingSpec): Keeping {
     if (unsaved?.ok === true) {
       spec.show(unsaved.value);
       isDirty = true;
-      void save();
     } else if (loaded.ok) spec.show(loaded.value.study);
   };
   const claim = (): void => {
