@@ -1,7 +1,6 @@
 // npm test: install when needed, types, lint, unit (layer rules among them) and published checks, browser; ends with a plain count.
 import { spawn } from 'node:child_process';
 import { mkdirSync, readFileSync } from 'node:fs';
-import { availableParallelism } from 'node:os';
 import { resolve } from 'node:path';
 import { fail, install, root, runTogether } from './install.mjs';
 
@@ -10,18 +9,12 @@ const started = performance.now();
 const { findChromium } = await import('./chromium.mjs');
 const chromium = await findChromium();
 
-await runTogether([
-  ['npm', 'run', '--silent', 'types'],
-  ['npm', 'run', '--silent', 'lint'],
-  ['npx', 'vite', 'build', '--logLevel', 'warn'],
-]);
-
 /** Runs the tests of one project; what it says is held back until it has ended, so that two do not talk at once. */
-function runProject(project, ...flags) {
+function runProject(project) {
   const file = resolve(root, `.cache/${project}.json`);
   const args = ['vitest', 'run', '--project', project, '--reporter=dot', '--reporter=json'];
   return new Promise((ended) => {
-    const child = spawn('npx', [...args, `--outputFile.json=${file}`, ...flags], {
+    const child = spawn('npx', [...args, `--outputFile.json=${file}`], {
       cwd: root,
       env: { ...process.env, CHROMIUM: chromium, TZ: 'UTC' },
     });
@@ -38,12 +31,15 @@ function runProject(project, ...flags) {
 }
 
 mkdirSync(resolve(root, '.cache'), { recursive: true });
-process.stdout.write('Unit and browser tests ...\n');
-// A browser test waits half its time, so it has one processor and what the others leave.
-const outcomes = await Promise.all([
-  runProject('unit', `--maxWorkers=${Math.max(1, availableParallelism() - 1)}`),
-  runProject('browser'),
+process.stdout.write('Unit tests, and beside them types, lint, build and browser tests ...\n');
+// Unit tests need nothing of the others; browser tests need what is built, and wait half their time.
+const unit = runProject('unit');
+await runTogether([
+  ['npm', 'run', '--silent', 'types'],
+  ['npm', 'run', '--silent', 'lint'],
+  ['npx', 'vite', 'build', '--logLevel', 'warn'],
 ]);
+const outcomes = await Promise.all([unit, runProject('browser')]);
 const passed = outcomes.reduce((sum, one) => sum + one.passed, 0);
 const failed = outcomes.reduce((sum, one) => sum + one.failed, 0);
 const broken = outcomes.some((one) => one.broken);
