@@ -12,15 +12,18 @@ const chromium = await findChromium();
 /** Runs the tests of one project; what it says is held back until it has ended, so that two do not talk at once. */
 function runProject(project) {
   const file = resolve(root, `.cache/${project}.json`);
-  const args = ['vitest', 'run', '--project', project, '--reporter=dot', '--reporter=json'];
+  const args = ['run', '--project', project, '--reporter=dot', '--reporter=json'];
   return new Promise((ended) => {
-    const child = spawn('npx', [...args, `--outputFile.json=${file}`], {
+    const runner = resolve(root, 'node_modules/vitest/vitest.mjs');
+    const child = spawn(process.execPath, [runner, ...args, `--outputFile.json=${file}`], {
       cwd: root,
       env: { ...process.env, CHROMIUM: chromium, TZ: 'UTC' },
     });
     const said = [];
     child.stdout.on('data', (data) => said.push(data));
     child.stderr.on('data', (data) => said.push(data));
+    // A check that fails ends everything: no tests go on behind it.
+    process.on('exit', () => child.kill());
     child.on('error', ({ message }) => fail(`vitest could not be started: ${message}`));
     child.on('close', (code) => {
       process.stdout.write(Buffer.concat(said));

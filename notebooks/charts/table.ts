@@ -47,12 +47,12 @@ export function tablePiece(table: Table): Piece {
   );
 }
 
-/** The same folded under its chart, with the way to take it away as a file (`saveTables` of the page). */
-export const tableBehind = (table: Table): Piece =>
+/** The same folded under its chart behind some words, with the way to take it away as a file (`saveTables` of the page). */
+export const tableBehind = (table: Table, words = 'Table'): Piece =>
   el(
     'details',
     { class: 'behind' },
-    el('summary', {}, 'Table'),
+    el('summary', {}, words),
     tablePiece(table),
     el('button', { type: 'button', class: 'action csv' }, 'Save as CSV'),
   );

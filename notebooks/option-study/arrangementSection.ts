@@ -138,8 +138,9 @@ export function arrangementSection(
         const { drawnPx: widthPx, scale, shown } = stackChainage(v.site, room.widthPx);
         return [
           roadProfile({ site: v.site, option: v.reference, widthPx, scale, shown, prefix: 'road' }),
-          tableBehind(roadTable(v.reference)),
-          v.site.soffitLimits.length > 0 && tableBehind(needTable(v.site, v.reference)),
+          tableBehind(roadTable(v.reference), 'Table of the road'),
+          v.site.soffitLimits.length > 0 &&
+            tableBehind(needTable(v.site, v.reference), 'Table of the levels needed'),
         ];
       },
       notes: [
