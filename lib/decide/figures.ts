@@ -5,7 +5,11 @@ const draws = { draws: 'books/draws', seed: 'books/seed' } as const;
 
 /** Options in the order of their median cost, as they are compared. */
 const order = (at: At): number[] => at.appraisal.options.map(({ number }) => number);
-const isCounted = (at: At): boolean => order(at).indexOf(at.index('a')) < order(at).indexOf(at.index('b'));
+/** Odds are counted of an option against those after it; none has odds against itself. */
+const isBefore = (at: At, first: string, second: string): boolean => {
+  const place = (name: string): number => order(at).indexOf(at.index(name));
+  return place(first) >= 0 && place(first) < place(second);
+};
 const oddsLabel = (at: At): string =>
   `odds that option ${at.name('a')} is cheaper than option ${at.name('b')}`;
 
@@ -13,7 +17,7 @@ const oddsLabel = (at: At): string =>
 export const standingFigures: readonly Descriptor[] = [
   described({
     path: 'standing/odds/:a/:b',
-    when: isCounted,
+    when: (at) => isBefore(at, 'a', 'b'),
     label: oddsLabel,
     unit: '',
     method: 'count of draws',
@@ -22,6 +26,7 @@ export const standingFigures: readonly Descriptor[] = [
   }),
   described({
     path: 'standing/odds/:a/:b',
+    when: (at) => isBefore(at, 'b', 'a'),
     label: oddsLabel,
     unit: '',
     method: 'difference',

@@ -115,8 +115,9 @@ describe('figure', () => {
       'rates/gold',
       'data/substructure',
       'standing/odds/1/1',
+      'standing/odds/998/999',
     ])
-      expect(() => figure(example(), path), path).toThrow(RangeError);
+      expect(() => figure(example(), path), path).toThrow(/: expected .+, received '/);
     expect(() => ask('site/depthM')).toThrow("path: expected a figure of the study, received 'site/depthM'");
   });
 
