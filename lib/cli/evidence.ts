@@ -1,17 +1,19 @@
 import { evidence } from '../evidence/index.ts';
 import { summary } from '../evidence/summary.ts';
+import { readFlags } from './flags.ts';
+import { jsonText, type Said } from './said.ts';
 
 /**
- * Published values against ours as JSON: every line, and a count by subject. Exit 0 when all deciding lines are within
- * their tolerance, 1 when one is not.
+ * `evidence`: published values against ours as JSON, every line and a count by subject. Exit 0 when all deciding lines
+ * are within their tolerance, 1 when one is not.
  */
-const lines = evidence();
-process.stdout.write(`${JSON.stringify({ subjects: summary(lines), lines }, null, 2)}\n`);
-const outside = lines.filter((line) => line.within === false);
-for (const line of outside) {
-  const percent = line.deviation === null ? '' : ` (${(100 * line.deviation).toFixed(1)} %)`;
-  process.stderr.write(
-    `${line.id} ${line.figure}: expected ${line.published} ${line.unit}, received ${line.ours}${percent}; source ${line.source}\n`,
-  );
+export function evidenceCommand(argv: readonly string[]): Said {
+  readFlags([], argv);
+  const lines = evidence();
+  const outside = lines.filter((line) => line.within === false);
+  const notes = outside.map((line) => {
+    const percent = line.deviation === null ? '' : ` (${(100 * line.deviation).toFixed(1)} %)`;
+    return `${line.id} ${line.figure}: expected ${line.published} ${line.unit}, received ${line.ours}${percent}; source ${line.source}`;
+  });
+  return { out: jsonText({ subjects: summary(lines), lines }), notes, code: outside.length > 0 ? 1 : 0 };
 }
-process.exitCode = outside.length > 0 ? 1 : 0;

@@ -1,6 +1,6 @@
 import { parseArgs } from 'node:util';
 import type { Problem } from '../model/index.ts';
-import { sentence } from '../messages/index.ts';
+import { refuse } from './refusal.ts';
 
 /** Values of the command line by flag, and what stands without a flag. */
 export interface Flags {
@@ -8,21 +8,30 @@ export interface Flags {
   readonly rest: readonly string[];
 }
 
-/** Writes problems to standard error, one line each, and ends with exit code 2 (bad input). */
-export function refuse(problems: readonly Problem[]): never {
-  for (const problem of problems) process.stderr.write(`${sentence(problem)}\n`);
-  process.exit(2);
+/** A negative number after a flag is its value and not another flag: `--span -3` is read as `--span=-3`. */
+function joined(words: readonly string[]): string[] {
+  return words.reduce<string[]>((list, word) => {
+    const before = list.at(-1) ?? '';
+    const isValue = /^-[\d.]/u.test(word) && before.startsWith('--') && !before.includes('=');
+    return isValue ? [...list.slice(0, -1), `${before}=${word}`] : [...list, word];
+  }, []);
 }
 
-/** Reads `--name value` flags; an unknown flag or a missing value is refused. */
+/**
+ * Reads `--name value` flags.
+ *
+ * @param names the flags there are
+ * @param argv the command line after the name of the command
+ * @throws Refusal where a flag is not known or has no value
+ */
 export function readFlags(names: readonly string[], argv: readonly string[]): Flags {
   try {
     const { values, positionals } = parseArgs({
-      args: [...argv],
+      args: joined(argv),
       options: Object.fromEntries(names.map((name) => [name, { type: 'string' as const }])),
       allowPositionals: true,
     });
-    return { values: values, rest: positionals };
+    return { values, rest: positionals };
   } catch (error) {
     return refuse([
       {
@@ -36,32 +45,16 @@ export function readFlags(names: readonly string[], argv: readonly string[]): Fl
   }
 }
 
-/** A number within limits, or a problem added to the list; undefined when the flag is absent. */
-export function numberFlag(
-  flags: Flags,
-  name: string,
-  limits: {
-    readonly above?: number;
-    readonly most?: number;
-    readonly whole?: boolean;
-    readonly unit: string;
-  },
-  problems: Problem[],
-): number | undefined {
-  const text = flags.values[name];
-  if (text === undefined) return undefined;
-  const value = text.trim() === '' ? NaN : Number(text);
-  const { above = -Infinity, most = Infinity, whole = false, unit } = limits;
-  if (value > above && value <= most && (!whole || Number.isInteger(value))) return value;
-  const kind = whole ? 'a whole number' : 'a number';
-  const upTo = Number.isFinite(most) ? `, at most ${most}` : '';
-  problems.push({
-    code: Number.isNaN(value) ? 'wrong-type' : value > above ? 'too-large-value' : 'too-small',
-    path: [`--${name}`],
-    expected: Number.isFinite(above) ? `${kind} above ${above}${upTo}` : kind,
-    received: text,
-    unit,
-    remedy: `give --${name} as ${kind} in ${unit}`,
-  });
-  return undefined;
+/** Adds a problem for every flag of the list that is absent. */
+export function needFlags(flags: Flags, names: readonly string[], problems: Problem[]): void {
+  for (const name of names) {
+    if (flags.values[name] !== undefined) continue;
+    problems.push({
+      code: 'missing',
+      path: [`--${name}`],
+      expected: 'a number',
+      received: 'nothing',
+      remedy: `give --${name}`,
+    });
+  }
 }

@@ -7,8 +7,11 @@ import { standardIds } from '../model/index.ts';
 import { meanRates, ratesFor } from '../price/index.ts';
 import { deckSpec } from '../site/index.ts';
 import { perM2, splitQuantities } from '../takeoff/index.ts';
-import { numberFlag, readFlags, refuse, type Flags } from './flags.ts';
+import { needFlags, readFlags, type Flags } from './flags.ts';
+import { numberFlag } from './numberFlag.ts';
+import { refuse } from './refusal.ts';
 import { rounded } from './rounded.ts';
+import { jsonText, type Said } from './said.ts';
 
 const flagNames = [
   'form',
@@ -98,20 +101,7 @@ function readTask(argv: readonly string[]): Asked {
     standardIds,
     problems,
   );
-  for (const [name, value] of [
-    ['width', widthM],
-    ['lanes', lanes],
-  ] as const) {
-    if (value === undefined && flags.values[name] === undefined) {
-      problems.push({
-        code: 'missing',
-        path: [`--${name}`],
-        expected: 'a number',
-        received: 'nothing',
-        remedy: `give --${name}`,
-      });
-    }
-  }
+  needFlags(flags, ['width', 'lanes'], problems);
   if (widthM !== undefined && carriagewayM !== undefined && !(carriagewayM > 0 && carriagewayM <= widthM)) {
     problems.push({
       code: 'outside',
@@ -159,43 +149,53 @@ function readTask(argv: readonly string[]): Asked {
   };
 }
 
-const { task, depthM: asked, haunch } = readTask(process.argv.slice(2));
 /** The task at a midspan depth, deeper over the piers where that was asked for. */
-const taskAt = (midspanM: number): UnitTask => ({
-  ...task,
-  depthM: midspanM,
-  ...(haunch > 1 ? { haunch: { pierDepthM: haunch * midspanM, law: 'parabolic' as const } } : {}),
-});
-const module = formModule(task.form);
-const mean = meanRates(ratesFor({ ratePack: 'demo-2026', rates: [] }));
-const depthM =
-  asked ??
-  finish(
-    leastCostDepth(depthRange(task.form, task.method, task.spansM, task.deck), (trialM) => {
-      const { lines, limitingCheck } = module.size(taskAt(trialM));
+function taskAt({ task, haunch }: Asked, midspanM: number): UnitTask {
+  return {
+    ...task,
+    depthM: midspanM,
+    ...(haunch > 1 ? { haunch: { pierDepthM: haunch * midspanM, law: 'parabolic' as const } } : {}),
+  };
+}
+
+/** The shallowest depth, m, within 1 % of the least cost of the deck at the mean rates that come with the tool. */
+function depthSought(asked: Asked): number {
+  const { form, method, spansM, deck } = asked.task;
+  const mean = meanRates(ratesFor({ ratePack: 'demo-2026', rates: [] }));
+  return finish(
+    leastCostDepth(depthRange(form, method, spansM, deck), (trialM) => {
+      const { lines, limitingCheck } = formModule(form).size(taskAt(asked, trialM));
       const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
       return { cost, utilisation: limitingCheck.utilisation };
     }),
   );
-const design = module.size(taskAt(depthM));
-const { superstructure, supports } = splitQuantities(design.lines);
-const deckAreaM2 = task.spansM.reduce((sum, span) => sum + span, 0) * task.deck.widthM;
-process.stdout.write(
-  `${JSON.stringify(
-    rounded({
-      form: task.form,
-      spans: task.spansM,
-      deckAreaM2,
-      depthM: design.depthM,
-      quantities: superstructure,
-      perM2: perM2(superstructure, deckAreaM2),
-      supports,
-      checks: design.checks.map(({ id, label, utilisation }) => ({ id, label, utilisation })),
-      limitingCheck: design.limitingCheck.id,
-      ownWeightShare: design.ownWeightShare,
-      warnings: design.warnings,
-    }),
-    null,
-    2,
-  )}\n`,
-);
+}
+
+/**
+ * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
+ * Without a depth the one of least cost in the published band is taken.
+ */
+export function sizeCommand(argv: readonly string[]): Said {
+  const asked = readTask(argv);
+  const { form, spansM, deck } = asked.task;
+  const design = formModule(form).size(taskAt(asked, asked.depthM ?? depthSought(asked)));
+  const { superstructure, supports } = splitQuantities(design.lines);
+  const deckAreaM2 = spansM.reduce((sum, span) => sum + span, 0) * deck.widthM;
+  return {
+    out: jsonText(
+      rounded({
+        form,
+        spans: spansM,
+        deckAreaM2,
+        depthM: design.depthM,
+        quantities: superstructure,
+        perM2: perM2(superstructure, deckAreaM2),
+        supports,
+        checks: design.checks.map(({ id, label, utilisation }) => ({ id, label, utilisation })),
+        limitingCheck: design.limitingCheck.id,
+        ownWeightShare: design.ownWeightShare,
+        warnings: design.warnings,
+      }),
+    ),
+  };
+}

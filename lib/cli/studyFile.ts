@@ -1,9 +1,9 @@
 import { readFileSync } from 'node:fs';
 import type { Study } from '../model/index.ts';
 import { readStudy } from '../study/index.ts';
-import { refuse } from './flags.ts';
+import { refuse } from './refusal.ts';
 
-/** The study of a file; a file that cannot be read or holds no study is refused with its reasons. */
+/** The study of a file. @throws Refusal where the file cannot be read or holds no study, with the reasons */
 export function studyFile(file: string): Study {
   let text: string;
   try {

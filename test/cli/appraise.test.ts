@@ -1,10 +1,8 @@
-import { readFileSync, writeFileSync, mkdtempSync } from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
-import { command } from './run.ts';
+import { appraiseCommand } from '../../lib/cli/appraise.ts';
+import { changedExample, example } from './exampleFile.ts';
+import { answer } from './run.ts';
 
-const example = 'data/examples/low-ferry.json';
 interface Printed {
   readonly options: {
     readonly family: string;
@@ -16,18 +14,9 @@ interface Printed {
   readonly standing: { leader: number | null; because: string[] };
 }
 
-/** The example with one change, as a file. */
-function changed(change: (study: Record<string, never>) => void): string {
-  const study = JSON.parse(readFileSync(example, 'utf8')) as Record<string, never>;
-  change(study);
-  const file = join(mkdtempSync(join(tmpdir(), 'study-')), 'study.json');
-  writeFileSync(file, JSON.stringify(study));
-  return file;
-}
-
 describe('appraise', () => {
   it('appraise(low-ferry.json) prints options of four families with spans, costs, rulings and reasons', () => {
-    const printed = command('appraise', example);
+    const printed = answer(appraiseCommand, example);
     expect(printed.err).toBe('');
     expect(printed.code).toBe(0);
     const result = JSON.parse(printed.out) as Printed;
@@ -69,7 +58,7 @@ describe('appraise', () => {
   ])(
     'appraise(study with %s) is refused with expected, received and remedy',
     (_what, change, words) => {
-      const printed = command('appraise', changed(change as (s: Record<string, never>) => void));
+      const printed = answer(appraiseCommand, changedExample(change as (s: Record<string, never>) => void));
       expect(printed.code).toBe(2);
       expect(printed.out).toBe('');
       expect(printed.err).toMatch(/expected .* received /);

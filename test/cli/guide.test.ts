@@ -1,26 +1,21 @@
-import { spawnSync } from 'node:child_process';
-import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { guideCommand } from '../../lib/cli/guide.ts';
+import { answer } from './run.ts';
 
-const root = join(import.meta.dirname, '..', '..');
-const run = (line: string) =>
-  spawnSync(process.execPath, ['--import', 'tsx', 'lib/cli/guide.ts', ...line.split(' ')], {
-    cwd: root,
-    encoding: 'utf8',
-  });
+const run = (line: string) => answer(guideCommand, line);
 
 describe('guide on the command line', () => {
   it('prints seventeen forms as JSON and leaves with 0', () => {
-    const { status, stdout, stderr } = run('--span 120 --width 12 --length 400 --radius 1500');
-    expect(stderr).toBe('');
-    expect(status).toBe(0);
-    const answer = JSON.parse(stdout) as { span: number; forms: { form: string; depthM: object }[] };
+    const { code, out, err } = run('--span 120 --width 12 --length 400 --radius 1500');
+    expect(err).toBe('');
+    expect(code).toBe(0);
+    const answer = JSON.parse(out) as { span: number; forms: { form: string; depthM: object }[] };
     expect(answer.span).toBe(120);
     expect(answer.forms).toHaveLength(17);
     expect(Object.keys(answer.forms[0]!.depthM)).toEqual(['support', 'midspan']);
   });
   it('gives every form its status, depths, reasons and sources, best first, and what turns it', () => {
-    const { forms } = JSON.parse(run('--span 120 --width 12').stdout) as {
+    const { forms } = JSON.parse(run('--span 120 --width 12').out) as {
       forms: Record<string, unknown>[];
     };
     const ranks = forms.map(({ status }) => ['in', 'possible', 'out'].indexOf(String(status)));
@@ -36,12 +31,12 @@ describe('guide on the command line', () => {
     }
   });
   it.each([
-    ['--span -3', /span: expected more than 0 m, received -3 m \(--span\)/],
+    ['--span -3', /span: expected a number above 0 m, received -3 m \(--span\)/],
     ['--span 100 --length 50', /length: expected at least the span of 100 m, received 50 m \(--length\)/],
   ])('%s leaves with 2 and says why on stderr', (line, message) => {
-    const { status, stdout, stderr } = run(line);
-    expect(status).toBe(2);
-    expect(stdout).toBe('');
-    expect(stderr).toMatch(message);
+    const { code, out, err } = run(line);
+    expect(code).toBe(2);
+    expect(out).toBe('');
+    expect(err).toMatch(message);
   });
 });

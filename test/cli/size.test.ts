@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { command } from './run.ts';
+import { sizeCommand } from '../../lib/cli/size.ts';
+import { answer } from './run.ts';
 
 interface Sized {
   readonly spans: number[];
@@ -10,76 +11,43 @@ interface Sized {
   readonly limitingCheck: string;
   readonly depthM: { support: number; midspan: number };
 }
-const size = (...args: string[]): Sized => JSON.parse(command('size', ...args).out) as Sized;
+const size = (line: string): Sized => JSON.parse(answer(sizeCommand, line).out) as Sized;
 
 describe('size', () => {
   it('size(composite-i 60,80,60) has 190 to 255 kg/m2 of structural steel, the plates of a twin-girder deck of that span', () => {
     // Twin-girder decks of the JRC/SETRA worked-example geometry (60-80-60 m, 12 m wide, girder 2.8 m): band from
     // practice, 0.105 L^1.6 + 100 = 216 kg/m2 at 80 m (from memory) and its usual scatter.
-    const sized = size(
-      '--form',
-      'composite-i',
-      '--spans',
-      '60,80,60',
-      '--width',
-      '12',
-      '--lanes',
-      '3',
-      '--depth',
-      '3.1',
-    );
+    const sized = size('--form composite-i --spans 60,80,60 --width 12 --lanes 3 --depth 3.1');
     expect(sized.deckAreaM2).toBe(2400);
     expect(sized.perM2['structuralSteelKg']).toBeGreaterThan(190);
     expect(sized.perM2['structuralSteelKg']).toBeLessThan(255);
     expect(sized.quantities['structuralSteelKg']! / 2400).toBeCloseTo(sized.perM2['structuralSteelKg']!, 2);
     const governing = sized.checks.find((check) => check.id === sized.limitingCheck)!;
     expect(governing.utilisation).toBe(Math.max(...sized.checks.map((check) => check.utilisation)));
-  }, 30_000);
+  });
 
   it('size(...) without a depth finds one inside the published band', () => {
-    const sized = size('--form', 'composite-i', '--spans', '60,80,60', '--width', '12', '--lanes', '3');
+    const sized = size('--form composite-i --spans 60,80,60 --width 12 --lanes 3');
     expect(sized.depthM.midspan / 80).toBeGreaterThanOrEqual(0.032);
     expect(sized.depthM.midspan / 80).toBeLessThanOrEqual(0.05);
-  }, 30_000);
+  });
 
   it('size(composite-i --haunch) is deeper over its piers than at midspan', () => {
-    const sized = size(
-      '--form',
-      'composite-i',
-      '--spans',
-      '60,80,60',
-      '--width',
-      '12',
-      '--lanes',
-      '3',
-      '--depth',
-      '2.6',
-      '--haunch',
-      '1.5',
-    );
+    const sized = size('--form composite-i --spans 60,80,60 --width 12 --lanes 3 --depth 2.6 --haunch 1.5');
     expect(sized.depthM).toEqual({ support: 3.9, midspan: 2.6 });
-  }, 30_000);
+  });
 
   it('size(bad input) is refused with subject, expected, received, place and remedy, exit code 2', () => {
-    const printed = command(
-      'size',
-      '--form',
-      'composite-i',
-      '--spans=-60,80',
-      '--width',
-      'wide',
-      '--lanes',
-      '2',
-    );
+    const printed = answer(sizeCommand, '--form composite-i --spans -60,80 --width wide --lanes 2');
     expect(printed.code).toBe(2);
     expect(printed.out).toBe('');
     expect(printed.err).toMatch(/spans: expected .* received -60,80 m \(--spans\)\. give --spans like/);
     expect(printed.err).toMatch(/width: expected .* received wide/);
-  }, 30_000);
+  });
 
   it('size(form nobody knows) names the forms there are', () => {
-    const printed = command('size', '--form', 'rope', '--spans', '60', '--width', '12', '--lanes', '2');
+    const printed = answer(sizeCommand, '--form rope --spans 60 --width 12 --lanes 2');
     expect(printed.code).toBe(2);
     expect(printed.err).toContain('composite-i');
-  }, 30_000);
+  });
 });
