@@ -49,15 +49,16 @@ const CLEAR_CLASS_M = 0.25;
 
 /** What a variant asks of the task of a unit at a depth, m. */
 function madeAs(
-  { haunchRatio, substringers, transverse }: Variant = {},
+  { haunchRatio, substringers, transverse, struts }: Variant = {},
   depthM: number,
-): Pick<UnitTask, 'haunch' | 'substringers' | 'transverse'> {
+): Pick<UnitTask, 'haunch' | 'substringers' | 'transverse' | 'struts'> {
   return {
     ...(haunchRatio === undefined
       ? {}
       : { haunch: { pierDepthM: Math.round(haunchRatio * depthM * STEPS) / STEPS, law: 'parabolic' } }),
     ...(substringers ? { substringers } : {}),
     ...(transverse ? { transverse } : {}),
+    ...(struts ? { struts } : {}),
   };
 }
 

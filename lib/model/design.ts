@@ -21,6 +21,8 @@ export interface UnitTask {
   readonly substringers?: boolean;
   /** Concrete boxes: tendons across the top slab, so that fewer cells carry the deck. */
   readonly transverse?: true;
+  /** Concrete boxes: inclined struts under the wings of the top slab, so that fewer cells carry the deck. */
+  readonly struts?: true;
   /** Thickness of an orthotropic deck plate, m, where it is given; by wheels and surfacing when absent. */
   readonly deckPlateM?: number;
   /** Cable-stayed: which supports (0-based) carry pylons. */

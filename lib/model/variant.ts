@@ -6,4 +6,6 @@ export interface Variant {
   readonly substringers?: true;
   /** Tendons across the top slab of a concrete box, so that fewer cells carry it. */
   readonly transverse?: true;
+  /** Inclined struts under the wings of a concrete box, so that fewer cells carry its deck. */
+  readonly struts?: true;
 }

@@ -181,6 +181,7 @@ const variant = z.strictObject({
   haunchRatio: z.number().gt(1).max(4).exactOptional(),
   substringers: z.literal(true).exactOptional(),
   transverse: z.literal(true).exactOptional(),
+  struts: z.literal(true).exactOptional(),
 });
 
 const options = z.strictObject({

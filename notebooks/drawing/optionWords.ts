@@ -30,12 +30,13 @@ export function optionNote(site: Site, option: AppraisedOption): string {
     : `${level(midspan)} m deep`;
   const beams = option.variant?.substringers ? ', substringers between the girders' : '';
   const across = option.variant?.transverse ? ', top slab prestressed across' : '';
+  const struts = option.variant?.struts ? ', wings on struts' : '';
   const above = structureTop(site, option) - roadTop(site, option);
   const tall = above > 4 ? `, ${length(Math.round(above))} m above the road` : '';
   const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
   const moved =
     rise > 0.005 ? `; road ${level(rise)} m higher` : rise < -0.005 ? `; road ${level(-rise)} m lower` : '';
-  return `${depth}${beams}${across}${tall}${moved}`;
+  return `${depth}${beams}${across}${struts}${tall}${moved}`;
 }
 
 /** Index of the longest span, which is printed bold. */

@@ -71,6 +71,7 @@ function made(option: AppraisedOption, kept: KeptOption | undefined, store: Stud
     ...(variant.haunchRatio === undefined ? [] : ['haunch']),
     ...(variant.substringers ? ['substringers'] : []),
     ...(variant.transverse ? ['tendons across'] : []),
+    ...(variant.struts ? ['struts'] : []),
   ].join(' and ');
   return action(`Make it without ${without}`, 'made.plain', () =>
     store.edit((study) => withVariant(study, option, {}), { what: `leaving out ${without}` }),

@@ -105,6 +105,30 @@ describe('workOption(option whose way of making is open)', () => {
   });
 });
 
+describe('workOption(wide concrete box whose way of making is open)', () => {
+  const boxOn = (mainM: number, variant?: Variant): Option => {
+    const { units, ...rest } = optionOn(mainM, variant);
+    const boxes = units.map((unit) => ({ ...unit, form: 'concrete-box' as const }));
+    return { ...rest, form: 'concrete-box', method: 'falsework', units: boxes };
+  };
+
+  it('rests the wings on struts where they pay', () => {
+    const bench = workbench(channel(6, 75));
+    const { option } = finish(workOption(bench, boxOn(75)));
+    const plain = finish(workOption(bench, boxOn(75, {}))).option;
+    expect(option.variant).toEqual({ struts: true });
+    const [made, level] = [option.designs[0]!, plain.designs[0]!];
+    expect(made.figures['cells']).toBeLessThan(level.figures['cells']!);
+    expect(made.lines.some(({ what }) => what === 'struts under the wings')).toBe(true);
+    expect(bench.costOf(option.lines)).toBeLessThan(0.99 * bench.costOf(plain.lines));
+  });
+
+  it('leaves the webs where they are under a shallow box', () => {
+    const bench = workbench(channel(5, 50));
+    expect(finish(workOption(bench, boxOn(50))).option.variant).toEqual({});
+  });
+});
+
 describe('workOption(variant that was chosen)', () => {
   it('keeps to it, in depth, drawing and price', () => {
     const bench = workbench(channel(2, 60));
@@ -125,7 +149,7 @@ describe('workOption(variant that was chosen)', () => {
     const units = [{ form: 'concrete-box', role: 'main', supportsM: [startM, endM] }] as const;
     const placed = keptUnits(site, { form: 'concrete-box', units, variant: { haunchRatio: 2 } });
     expect(placed).toMatchObject({
-      because: [expect.stringMatching(/haunchRatio cannot be chosen; it has transverse/u)],
+      because: [expect.stringMatching(/haunchRatio cannot be chosen; it has transverse, struts/u)],
     });
   });
 });

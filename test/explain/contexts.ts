@@ -197,6 +197,7 @@ export const variants = (): Context =>
         kept: [
           kept(40, 'composite-i', { haunchRatio: 1.6, substringers: true }),
           kept(41, 'concrete-box', { transverse: true }),
+          kept(42, 'concrete-box', { struts: true }),
         ],
       },
     };

@@ -31,14 +31,15 @@ export function acrossStress(
 
 /**
  * Lasting force per metre, kN, that keeps the pressed-open face of a slab of a thickness within the tension allowed under a
- * service moment, with its axis as near to that face as cover allows. Negative where the slab needs none.
+ * service moment and a tension in the slab, kN/m, with its axis as near to that face as cover allows. Negative where the slab needs none.
  */
-export function acrossNeed(momentKNm: number, thicknessM: number, standard: StandardId): number {
+export function acrossNeed(momentKNm: number, thicknessM: number, standard: StandardId, tieKNm = 0): number {
   const modulus = thicknessM ** 2 / 6;
   const e = thicknessM / 2 - boxData.across.axisM;
   const tension = boxData.serviceTensionMPa[standard] * 1e3;
   return (
-    (momentKNm / modulus - tension) / (boxData.prestressSpread[standard] * (1 / thicknessM + e / modulus))
+    (momentKNm / modulus + tieKNm / thicknessM - tension) /
+    (boxData.prestressSpread[standard] * (1 / thicknessM + e / modulus))
   );
 }
 
@@ -54,6 +55,7 @@ export function acrossSlab(slab: SlabCase): AcrossSlab {
   const { fckMPa, fctmMPa } = concrete(id, materials.concreteDefaultMPa[id].box);
   const { spanMoments, overhangMoments, innerRootMoments, edgeM } = slabMoments(slab);
   const { uls, sls } = standard.factors;
+  const tie = slab.tie ?? { serviceKNm: 0, ultimateKNm: 0 };
   const lasting = (m: SlabMoments): number => m.permanent + m.superimposed;
   const service = (m: SlabMoments): number => lasting(m) + sls.vehicle * m.traffic;
   const ultimate = (m: SlabMoments): number =>
@@ -77,7 +79,7 @@ export function acrossSlab(slab: SlabCase): AcrossSlab {
   const thicknessFor = (from: number, momentsAt: (t: number) => SlabMoments): number => {
     const step = slabData.stepM.value;
     const bad = (t: number): boolean => {
-      const need = acrossNeed(service(momentsAt(t)), t, id);
+      const need = acrossNeed(service(momentsAt(t)), t, id, tie.serviceKNm);
       return need > mostKNm || pressed(momentsAt(t), t, Math.max(0, need)) > compression.total * fckMPa * 1e3;
     };
     let t = Math.ceil(from / step - 1e-9) * step;
@@ -93,14 +95,14 @@ export function acrossSlab(slab: SlabCase): AcrossSlab {
   ] as const;
   const forceKNm = Math.max(
     0,
-    ...places.map(({ moments, thicknessM }) => acrossNeed(service(moments), thicknessM, id)),
+    ...places.map(({ moments, thicknessM }) => acrossNeed(service(moments), thicknessM, id, tie.serviceKNm)),
   );
   const tendonM2 = forceKNm / (lastingMPa * 1e3);
   const startKNm = tendonM2 * initialMPa * 1e3;
   const carriedKN = (tendonM2 * materials.strand[id].proofMPa * 1e3) / standard.resistance.prestress;
   const [mid, root] = places.map(({ moments, thicknessM }) => {
     const leverM = slabData.leverRatio.value * (thicknessM - across.axisM);
-    const restKN = ultimate(moments) / leverM - carriedKN;
+    const restKN = ultimate(moments) / leverM + tie.ultimateKNm / 2 - carriedKN;
     return {
       areaM2: Math.max(0, restKN / (barDesignMPa(id) * 1e3)),
       effectiveM: thicknessM - slabData.barAxisM.value,

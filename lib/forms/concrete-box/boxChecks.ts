@@ -83,7 +83,7 @@ export function boxChecks(model: BoxModel, box: SizedBox): Check[] {
       ),
     );
   }
-  return [...checks, ...model.layout.slab.checks];
+  return [...checks, ...model.layout.slab.checks, ...(model.layout.struts?.checks ?? [])];
 }
 
 function bending(id: string, label: string, use: BendingUse): Check {

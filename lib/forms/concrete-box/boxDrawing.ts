@@ -3,6 +3,7 @@ import { constantDepth } from '../common/depthAlong.ts';
 import { deckFace, soffitLine, upright } from '../common/elevation.ts';
 import { deckFurniture } from '../common/furniture.ts';
 import { boxData } from './boxData.ts';
+import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxSection } from './boxSection.ts';
 import type { SizedBox } from './sizeBox.ts';
@@ -25,6 +26,23 @@ export function boxElevation(model: BoxModel, box: SizedBox): Shape[] {
     const at = j === 0 ? endM / 2 : j === last ? lengthM - endM / 2 : x;
     shapes.push(upright('diaphragm', 'concrete', along, at, layout.slab.midM, inner ? pierM : endM));
   });
+  if (layout.struts) {
+    const { spacingM, sideM } = layout.struts;
+    const { footAboveSoffitM, headBelowTopM } = boxData.struts;
+    const rows = Math.max(1, Math.floor(lengthM / spacingM));
+    const firstM = (lengthM - (rows - 1) * spacingM) / 2;
+    for (let k = 0; k < rows; k++)
+      shapes.push({
+        ...upright(
+          'strut',
+          'concrete',
+          constantDepth(lengthM, task.depthM - footAboveSoffitM),
+          firstM + k * spacingM,
+          headBelowTopM,
+          sideM,
+        ),
+      });
+  }
   for (const x of jointsOf(model)) shapes.push(upright('construction joint', 'concrete', along, x, 0, 0.02));
   return shapes;
 }
@@ -56,7 +74,25 @@ export function boxSections(model: BoxModel, box: SizedBox): SectionCut[] {
     const pier = longest > 0 ? longest : 1;
     cuts.push(cutOf(model.task.deck, 'pier', model.supportsM[pier]!, box.sections.pier));
   }
-  return cuts;
+  const struts = strutsOf(model.layout);
+  return cuts.map((cut) => ({ ...cut, shapes: [...struts, ...cut.shapes] }));
+}
+
+/** Struts under the wings of a section: from the foot of the outer webs to the heads, as lines. */
+function strutsOf({ struts, cells, spacingM }: BoxLayout): Shape[] {
+  if (!struts) return [];
+  const { headBelowTopM } = boxData.struts;
+  const headM = (cells * spacingM) / 2 + struts.outM;
+  return [-1, 1].map((side) => ({
+    part: 'strut',
+    material: 'concrete',
+    kind: 'line',
+    points: [
+      [side * headM, -headBelowTopM],
+      [side * (headM - struts.runM), -headBelowTopM - struts.riseM],
+    ],
+    thicknessM: struts.sideM,
+  }));
 }
 
 /** A section of a box with what stands on its deck. */

@@ -1,8 +1,11 @@
+import { loadStandard } from '../../actions/index.ts';
 import type { UnitTask } from '../../model/index.ts';
 import { designSlab, type SlabDesign } from '../common/slab/designSlab.ts';
 import type { SlabCase } from '../common/slab/slabCase.ts';
 import { acrossSlab } from './acrossSlab.ts';
 import { boxData } from './boxData.ts';
+import { strutPlan } from './strutPlan.ts';
+import { designStruts, type Struts } from './struts.ts';
 
 /** Cells and webs of a box, and its top slab. */
 export interface BoxLayout {
@@ -10,13 +13,15 @@ export interface BoxLayout {
   readonly webs: number;
   /** Between web axes at the top, m. */
   readonly spacingM: number;
-  /** From the axis of an outer web to the edge of the deck, m. */
+  /** From the axis of an outer web, or the line of strut heads beyond it, to the edge of the deck, m. */
   readonly overhangM: number;
   /** Horizontal over vertical of the outer webs. */
   readonly slope: number;
   readonly slab: SlabDesign;
   /** Strand of tendons across the top slab, kg per m2 of deck, and their lasting force, kN/m; absent where it has none. */
   readonly across?: { readonly strandKgM2: number; readonly forceKNm: number };
+  /** Struts under the wings; absent where they only overhang. */
+  readonly struts?: Struts;
 }
 
 /** Cells of a box under a top slab with or without tendons across the deck. */
@@ -28,16 +33,19 @@ export function cellsFor(widthM: number, hasTendonsAcross: boolean): number {
 
 /**
  * As few cells as keep the webs within the practical spacing of a slab, plain or with tendons across the deck, overhangs in
- * a fixed proportion to it, outer webs leaning inwards, and the top slab designed across the webs.
+ * a fixed proportion to it, outer webs leaning inwards, and the top slab designed across the webs and, where the wings have
+ * them, their struts.
  */
 export function boxLayout(task: UnitTask): BoxLayout {
   const { overhangOverSpacing } = boxData.layout;
-  const { deck, transverse } = task;
-  const cells = cellsFor(deck.widthM, transverse === true);
-  const spacingM = deck.widthM / (cells + 2 * overhangOverSpacing);
-  const overhangM = overhangOverSpacing * spacingM;
+  const { deck, depthM, standard } = task;
+  const across = task.transverse === true;
+  const plan = task.struts
+    ? strutPlan(deck.widthM, depthM, across)
+    : plainPlan(deck.widthM, cellsFor(deck.widthM, across), overhangOverSpacing);
+  const { cells, spacingM, overhangM } = plan;
   const slabCase: SlabCase = {
-    standard: task.standard,
+    standard,
     deck,
     direction: 'across',
     spacingM,
@@ -45,16 +53,32 @@ export function boxLayout(task: UnitTask): BoxLayout {
     continuous: true,
     uniform: false,
   };
-  const base = {
-    cells,
-    webs: cells + 1,
-    spacingM,
-    overhangM,
-    slope: webSlope(cells * spacingM, task.depthM),
-  };
-  if (!transverse) return { ...base, slab: designSlab(slabCase) };
+  const slope = webSlope(cells * spacingM, depthM);
+  const base = { cells, webs: cells + 1, spacingM, overhangM, slope };
+  if (!task.struts) return { ...base, ...topSlab(slabCase, across) };
+  // The weight of the slab presses on the struts, and their pull thickens the slab a little: twice is enough.
+  const first = topSlab(slabCase, across);
+  const strutCase = { standard, deck, plan, depthM, slope };
+  const { tie } = designStruts({ ...strutCase, slab: first.slab });
+  const share = across ? loadStandard(standard).factors.sls.vehicle : 1;
+  const serviceKNm = tie.lastingKNm + share * tie.trafficKNm;
+  const tied = topSlab({ ...slabCase, tie: { serviceKNm, ultimateKNm: tie.ultimateKNm } }, across);
+  return { ...base, ...tied, struts: designStruts({ ...strutCase, slab: tied.slab }) };
+}
+
+function plainPlan(
+  widthM: number,
+  cells: number,
+  overhangOverSpacing: number,
+): Omit<ReturnType<typeof strutPlan>, 'outM'> & { readonly outM: 0 } {
+  const spacingM = widthM / (cells + 2 * overhangOverSpacing);
+  return { cells, spacingM, outM: 0, overhangM: overhangOverSpacing * spacingM };
+}
+
+function topSlab(slabCase: SlabCase, isAcross: boolean): Pick<BoxLayout, 'slab' | 'across'> {
+  if (!isAcross) return { slab: designSlab(slabCase) };
   const { strandKgM2, forceKNm, ...slab } = acrossSlab(slabCase);
-  return { ...base, slab, across: { strandKgM2, forceKNm } };
+  return { slab, across: { strandKgM2, forceKNm } };
 }
 
 /** Horizontal over vertical of the outer webs of a box of given width between their axes at the top and depth, m. */

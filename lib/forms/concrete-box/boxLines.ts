@@ -47,7 +47,7 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
       `${layout.webs} webs, ${group.tendonsPerWeb} tendons of ${group.strandsPerTendon.toFixed(1)} strands each${tendons.meanShare < 1 ? `, ${(100 * tendons.meanShare).toFixed(0)} % of them along the mean of the deck` : ''}`,
     ),
   ];
-  lines.push(...acrossLines(model));
+  lines.push(...acrossLines(model), ...strutLines(model));
   if (tendons.straightStrands > 0)
     lines.push(
       measured(
@@ -86,6 +86,35 @@ export function acrossLines({
       across.strandKgM2 * lengthM * task.deck.widthM,
       'tendons across the top slab',
       `${across.forceKNm.toFixed(0)} kN per m of deck after losses, ${across.strandKgM2.toFixed(1)} kg/m2`,
+    ),
+  ];
+}
+
+/** Struts under the wings and bars of the slab thickened along their heads, where it has them. */
+function strutLines({ layout: { struts }, lengthM }: BoxModel): MeasuredLine[] {
+  if (!struts) return [];
+  const { spacingM, sideM, concreteM3M, barsKgM, beamBarsKgM, beamM, lengthM: eachM } = struts;
+  return [
+    measured(
+      'deck',
+      'precast-concrete',
+      concreteM3M * lengthM,
+      'struts under the wings',
+      `2 rows every ${spacingM} m, ${mm(sideM)} mm square, ${eachM.toFixed(1)} m long`,
+    ),
+    measured(
+      'deck',
+      'reinforcement',
+      barsKgM * lengthM,
+      'bars of the struts',
+      '1 % of their section, laps included',
+    ),
+    measured(
+      'deck',
+      'reinforcement',
+      beamBarsKgM * lengthM,
+      'bars along the heads of the struts',
+      `2 thickenings of the slab to ${mm(beamM)} mm, bending from strut to strut and shear`,
     ),
   ];
 }

@@ -7,7 +7,7 @@ import type { SectionsAlong } from './sectionsAlong.ts';
 /** Own weight of the box. */
 export interface OwnWeight {
   readonly effects: Effects;
-  /** Weight along the spans at the stations, blisters included, kN/m. */
+  /** Weight along the spans at the stations, blisters and struts included, kN/m. */
   readonly loadKNm: Float64Array;
   /** Concrete along the spans without blisters and diaphragms, m3. */
   readonly boxM3: number;
@@ -21,7 +21,8 @@ export function ownWeight(model: BoxModel, sections: SectionsAlong): OwnWeight {
   const { beam, standard } = model;
   const { share } = boxData.blisters;
   const gamma = standard.unitWeights.concreteKNm3;
-  const loadKNm = sections.areaM2.map((area) => gamma * (1 + share) * area);
+  const strutsM3M = model.layout.struts?.concreteM3M ?? 0;
+  const loadKNm = sections.areaM2.map((area) => gamma * ((1 + share) * area + strutsM3M));
   let boxM3 = 0;
   for (let e = 0; e < loadKNm.length - 1; e++)
     boxM3 += ((sections.areaM2[e]! + sections.areaM2[e + 1]!) / 2) * (beam.xM[e + 1]! - beam.xM[e]!);

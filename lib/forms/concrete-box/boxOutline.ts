@@ -21,9 +21,9 @@ const leastVoidM = 0.2;
  * spacing and chamfers at the bottom. `webM` is measured square to the web.
  */
 export function outlineOf(layout: BoxLayout, depthM: number, webM: number, bottomM: number): Outline {
-  const { slab, spacingM, webs, cells, slope, overhangM } = layout;
+  const { slab, spacingM, webs, cells, slope, overhangM, struts } = layout;
   const half = (cells * spacingM) / 2;
-  const edge = half + overhangM;
+  const edge = half + (struts?.outM ?? 0) + overhangM;
   const lean = webM * Math.hypot(1, slope);
   // Axis of web w at a depth; only the outer webs lean.
   const axis = (w: number, depth: number): number => {
@@ -35,15 +35,12 @@ export function outlineOf(layout: BoxLayout, depthM: number, webM: number, botto
   const outside = half + lean / 2;
   const soffit = outside - slope * depthM;
   const rootAt = outside - slope * slab.rootM;
+  const wing: Point[] = [[edge, 0], [edge, -slab.edgeM], ...underWing(layout, rootAt), [rootAt, -slab.rootM]];
   const outer: Point[] = [
-    [-edge, 0],
-    [-edge, -slab.edgeM],
-    [-rootAt, -slab.rootM],
+    ...wing.map(([y, z]): Point => [-y, z]),
     [-soffit, -depthM],
     [soffit, -depthM],
-    [rootAt, -slab.rootM],
-    [edge, -slab.edgeM],
-    [edge, 0],
+    ...wing.reverse(),
   ];
   const innerM = depthM - slab.midM - bottomM;
   const floor = depthM - bottomM;
@@ -71,4 +68,21 @@ export function outlineOf(layout: BoxLayout, depthM: number, webM: number, botto
     }
   }
   return { outer, cells: holes, bottomWidthM: 2 * soffit, innerM };
+}
+
+/** Soffit of a wing on struts from its overhang to the web: the thickening along the heads, and the slab between them and the web. */
+function underWing({ slab, struts, spacingM, cells }: BoxLayout, rootAtM: number): Point[] {
+  if (!struts) return [];
+  const { outM, beamM, beamWidthM } = struts;
+  const headM = (cells * spacingM) / 2 + outM;
+  const [outside, inside] = [headM + beamWidthM / 2, headM - beamWidthM / 2];
+  const taperM = Math.max(0, Math.min(outM / 4, (inside - rootAtM) / 2));
+  return [
+    [outside, -slab.rootM],
+    [outside, -beamM],
+    [inside, -beamM],
+    [inside, -slab.rootM],
+    [inside - taperM, -slab.midM],
+    [rootAtM + taperM, -slab.midM],
+  ];
 }

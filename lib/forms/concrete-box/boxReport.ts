@@ -3,6 +3,7 @@ import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SizedBox } from './sizeBox.ts';
+import type { Struts } from './struts.ts';
 
 /**
  * Characteristic reactions of the whole deck: own weight with diaphragms, superimposed load, traffic. The parasitic part
@@ -45,8 +46,10 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
   const { layout, beam, task, traffic, lengthM } = model;
   const { sections, tendons, own, thicknesses } = box;
   const areaM2 = lengthM * task.deck.widthM;
-  const concreteM3 = own.boxM3 + own.blistersM3 + own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
-  const barsKg = boxBars(model, box).totalKg;
+  const strutsM3 = (layout.struts?.concreteM3M ?? 0) * lengthM;
+  const concreteM3 = strutsM3 + own.boxM3 + own.blistersM3 + own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
+  const strutBarsKg = layout.struts ? (layout.struts.barsKgM + layout.struts.beamBarsKgM) * lengthM : 0;
+  const barsKg = boxBars(model, box).totalKg + strutBarsKg;
   const strands = tendons.strandsPerWeb * layout.webs + tendons.straightStrands;
   const figures: Record<string, number> = {
     cells: layout.cells,
@@ -58,6 +61,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
+    ...(layout.struts ? strutFigures(layout.struts) : {}),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,
@@ -104,4 +108,18 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     figures.launchingSagKNm = box.launch.sagKNm;
   }
   return figures;
+}
+
+function strutFigures(struts: Struts): Record<string, number> {
+  const { outM, sideM, lengthM, riseM, forceKN, tie, hangKNm, beamM } = struts;
+  return {
+    strutsOutM: outM,
+    strutRiseM: riseM,
+    strutLengthM: lengthM,
+    strutSideM: sideM,
+    strutForceKN: forceKN,
+    strutTieKNm: tie.ultimateKNm,
+    strutHangKNm: hangKNm,
+    strutBeamM: beamM,
+  };
 }

@@ -82,6 +82,7 @@ export function boxShear(
       axialMPa: (share * tendons.forceKN + tendons.straightKN) / sections.areaM2[at]! / 1e3,
       effectiveM: task.depthM - boxData.ductCoverM.value,
       acrossKNm: across,
+      ...(layout.struts ? { hangKNm: layout.struts.hangKNm } : {}),
     });
   }
   return { demands, webShare, enclosedM2, mostKN };

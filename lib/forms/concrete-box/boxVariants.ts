@@ -1,7 +1,32 @@
-import type { DeckSpec, Variant } from '../../model/index.ts';
+import type { DeckSpec, MethodId, Variant } from '../../model/index.ts';
+import { depthBand } from '../../rules/index.ts';
 import { cellsFor } from './boxLayout.ts';
+import { strutPlan } from './strutPlan.ts';
 
 /** Ways of making a concrete box besides a plain top slab: tendons across it, where they save a cell. */
 export function boxVariants(_spansM: readonly number[], { widthM }: DeckSpec): readonly Variant[] {
   return cellsFor(widthM, true) < cellsFor(widthM, false) ? [{ transverse: true }] : [];
+}
+
+/**
+ * The same for a box of constant depth, whose wings may rest on struts as well, with a plain slab or tendons across it,
+ * where one cell without struts no longer carries the deck and struts save a cell. A launched box is pushed out without
+ * its wings, and has none.
+ */
+export function wideBoxVariants(
+  spansM: readonly number[],
+  deck: DeckSpec,
+  method: MethodId,
+): readonly Variant[] {
+  const { widthM } = deck;
+  const made: Variant[] = [...boxVariants(spansM, deck)];
+  if (method === 'launch' || cellsFor(widthM, true) === 1) return made;
+  const continuity = spansM.length > 1 ? 'continuous' : 'simple';
+  // As far as struts reach in the deepest box of the published band.
+  const depthM = Math.max(...spansM) * depthBand('concrete-box', continuity, method)[1];
+  const strutted = strutPlan(widthM, depthM, false).cells;
+  if (strutted < cellsFor(widthM, false)) made.push({ struts: true });
+  if (strutPlan(widthM, depthM, true).cells < Math.min(strutted, cellsFor(widthM, true)))
+    made.push({ transverse: true, struts: true });
+  return made;
 }

@@ -3,6 +3,7 @@ import { acrossFigures } from './acrossFigures.ts';
 import { formManual, linesOf, spansOf } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { boxCheckFigures } from './checkFigures.ts';
+import { strutFigures } from './strutFigures.ts';
 import { tendonFigures } from './tendonFigures.ts';
 
 const manual = formManual('concrete-box');
@@ -18,6 +19,8 @@ const bars = [
   'webs along',
   'diaphragms',
   'blisters and anchorages',
+  'bars of the struts',
+  'bars along the heads of the struts',
 ];
 const strands = ['draped tendons', 'centred tendons for launching'];
 const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/widthM` }) as const;
@@ -25,13 +28,18 @@ const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/wid
 const itemLines = (at: At, item: string, what: readonly string[]): string[] =>
   linesOf(at, ...what).filter((path) => at.design.lines[Number(path.split('/').at(-2))]!.item === item);
 
+const concreteLines = (at: At): string[] => [
+  ...itemLines(at, 'box-concrete', concrete),
+  ...linesOf(at, 'struts under the wings'),
+];
+
 /** Concrete box: section and quantities of the whole deck, its tendons, its checks. */
 export const boxFigures: readonly Descriptor[] = [
   sized(
     'cells',
     'cells of the box',
     'no',
-    'as few as keep the webs within their practical spacing, which is wider where tendons run across the slab',
+    'as few as keep the webs within their practical spacing, which is wider where tendons run across the slab; struts carry the wings in their stead where it has them',
     './task/deck/widthM',
     'data/concrete-box/layout/mostWebSpacingM',
     'data/concrete-box/across/mostWebSpacingM',
@@ -49,16 +57,18 @@ export const boxFigures: readonly Descriptor[] = [
     label: 'spacing of the webs',
     unit: 'm',
     method: 'layout',
-    formula: 'deck width / (cells + 2 x overhang over spacing)',
+    formula:
+      'deck width, less twice what strut heads lie beyond the webs / (cells + 2 x overhang over spacing)',
     inputs: (at) => ({
       width: `${at.unit}/task/deck/widthM`,
+      out: at.design.figures['strutsOutM'] === undefined ? [] : [`${at.unit}/figures/strutsOutM`],
       cells: `${at.unit}/figures/cells`,
       ratio: 'data/concrete-box/layout/overhangOverSpacing',
     }),
-    compute: ({ width, cells, ratio }) => width / (cells + 2 * ratio),
+    compute: ({ width, out, cells, ratio }) => (width - 2 * sum(out)) / (cells + 2 * ratio),
   }),
   figure('overhangM', {
-    label: 'overhang beyond the outer web',
+    label: 'overhang beyond the outer web, or beyond its strut heads',
     unit: 'm',
     method: 'product',
     formula: 'overhang over spacing x spacing of the webs',
@@ -200,8 +210,8 @@ export const boxFigures: readonly Descriptor[] = [
     label: 'concrete per m2 of deck',
     unit: 'm3/m2',
     method: 'ratio',
-    formula: '(box + blisters and joints + diaphragms) / (length x deck width)',
-    inputs: (at) => ({ lines: itemLines(at, 'box-concrete', concrete), ...area(at) }),
+    formula: '(box + blisters and joints + diaphragms + struts) / (length x deck width)',
+    inputs: (at) => ({ lines: concreteLines(at), ...area(at) }),
     compute: ({ lines, spans, width }) => sum(lines) / (sum(spans) * width),
   }),
   figure('barsKgM3', {
@@ -211,7 +221,7 @@ export const boxFigures: readonly Descriptor[] = [
     formula: 'all bars / all concrete',
     inputs: (at) => ({
       bars: itemLines(at, 'reinforcement', bars),
-      concrete: itemLines(at, 'box-concrete', concrete),
+      concrete: concreteLines(at),
     }),
     compute: (v) => sum(v.bars) / sum(v.concrete),
   }),
@@ -234,4 +244,5 @@ export const boxFigures: readonly Descriptor[] = [
   ...boxCheckFigures,
   ...slabCheckFigures(manual, 'topSlabMidM'),
   ...acrossFigures(manual),
+  ...strutFigures(manual),
 ];

@@ -9,13 +9,13 @@ import { boxElevation, boxSections } from './boxDrawing.ts';
 import { boxFigures, boxReactions, ownWeightShare } from './boxReport.ts';
 import { boxLines } from './boxLines.ts';
 import { boxModel } from './boxModel.ts';
-import { boxVariants } from './boxVariants.ts';
+import { wideBoxVariants } from './boxVariants.ts';
 import { heightUnder } from './heightUnder.ts';
 import { sizeBox } from './sizeBox.ts';
 
 /**
  * Prestressed concrete box of constant depth, cast in place on falsework or launched from one end: cells by the width of
- * the deck, draped bonded tendons. `depthM` of the task is soffit to top of slab. Simple or continuous spans of about 20
+ * the deck and by struts under its wings, draped bonded tendons. `depthM` of the task is soffit to top of slab. Simple or continuous spans of about 20
  * to 100 m, decks of 8 to 25 m.
  */
 export const concreteBox: FormModule = {
@@ -24,8 +24,8 @@ export const concreteBox: FormModule = {
   name: 'Concrete box',
   pattern: { kind: 'continuous' },
   methods: ['falsework', 'launch'],
-  choices: ['transverse'],
-  variants: boxVariants,
+  choices: ['transverse', 'struts'],
+  variants: wideBoxVariants,
   size,
 };
 

@@ -18,6 +18,8 @@ export interface WebDemand {
   readonly effectiveM: number;
   /** Bending of the web across the deck, kNm per m. */
   readonly acrossKNm: number;
+  /** Load that struts bring to its foot, to be hung up in it, kN per m of deck; none when absent. */
+  readonly hangKNm?: number;
 }
 
 /** What a web of given thickness makes of it. */
@@ -32,18 +34,23 @@ export interface WebUse {
 
 /**
  * Variable struts (EN 1992-1-1 6.2.3) or the sectional model (AASHTO LRFD 5.7.3), both from memory. Stirrups carry the
- * bending across the web too: half of one with the whole of the other, whichever is more.
+ * bending across the web too: half of one with the whole of the other, whichever is more; what struts bring to its foot hangs
+ * in them besides.
  */
 export function webShear(model: Strengths, webM: number, ductM: number, demand: WebDemand): WebUse {
   const clear = webM - (ductM > webM / 8 ? boxData.shear.ductShare[model.standardId] : 0) * ductM;
   const lever = boxData.shear.leverRatio * demand.effectiveM;
   const fy = barDesignMPa(model.standardId) * 1e3;
-  const { shear, crushing, least } =
-    model.standardId === 'hl93'
-      ? sectional(model, clear, webM, lever, fy, demand)
-      : variableStruts(model, clear, webM, lever, fy, demand);
+  const {
+    shear: upright,
+    crushing,
+    least,
+  } = model.standardId === 'hl93'
+    ? sectional(model, clear, webM, lever, fy, demand)
+    : variableStruts(model, clear, webM, lever, fy, demand);
   const acrossDepth = Math.max(0.05, webM - 0.07);
   const bendingFace = demand.acrossKNm / (0.9 * acrossDepth * fy);
+  const shear = upright + (demand.hangKNm ?? 0) / fy;
   const face = Math.max(shear / 2 + bendingFace / 2, shear / 4 + bendingFace, least / 2);
   return {
     stirrupsM2PerM: 2 * face,

@@ -1,4 +1,4 @@
-import type { Check, StandardId } from '../../../model/index.ts';
+import type { Check } from '../../../model/index.ts';
 import { loadStandard, type LoadStandard } from '../../../actions/index.ts';
 import { barDesignMPa, barKg } from '../bars.ts';
 import { check } from '../checks.ts';
@@ -33,19 +33,17 @@ export function designSlab(slab: SlabCase): SlabDesign {
   const least = Math.max(d.leastThicknessM[slab.standard], slab.spacingM / d.spanOverThickness.value);
   const { spanMoments, overhangMoments, innerRootMoments, edgeM } = slabMoments(slab);
 
-  const mid = thicknessFor(least, step, (t) => demand(spanMoments(t), t, slab.standard, standard));
+  const mid = thicknessFor(least, step, (t) => demand(spanMoments(t), t, slab, standard));
   const rootLeast = slab.overhangM > 0 ? Math.max(mid.thicknessM, edgeM) : mid.thicknessM;
-  const overhang = thicknessFor(rootLeast, step, (t) =>
-    demand(overhangMoments(t), t, slab.standard, standard),
-  );
-  const inner = thicknessFor(rootLeast, step, (t) => demand(innerRootMoments(t), t, slab.standard, standard));
+  const overhang = thicknessFor(rootLeast, step, (t) => demand(overhangMoments(t), t, slab, standard));
+  const inner = thicknessFor(rootLeast, step, (t) => demand(innerRootMoments(t), t, slab, standard));
   const root = overhang.thicknessM >= inner.thicknessM ? overhang : inner;
   const rootM = root.thicknessM;
   const midM = slab.uniform ? rootM : mid.thicknessM;
 
-  const midBars = demand(spanMoments(midM), midM, slab.standard, standard);
-  const overhangBars = demand(overhangMoments(rootM), rootM, slab.standard, standard);
-  const innerBars = demand(innerRootMoments(rootM), rootM, slab.standard, standard);
+  const midBars = demand(spanMoments(midM), midM, slab, standard);
+  const overhangBars = demand(overhangMoments(rootM), rootM, slab, standard);
+  const innerBars = demand(innerRootMoments(rootM), rootM, slab, standard);
   const rootBars = overhangBars.areaM2 > innerBars.areaM2 ? overhangBars : innerBars;
 
   const width = slab.direction === 'across' ? slab.deck.widthM : 1;
@@ -95,8 +93,11 @@ interface BarDemand {
   readonly ratio: number;
 }
 
-/** Bars of one face at ultimate and in service: As = M / (z f). */
-function demand(moments: SlabMoments, thicknessM: number, id: StandardId, standard: LoadStandard): BarDemand {
+const noTie = { serviceKNm: 0, ultimateKNm: 0 } as const;
+
+/** Bars of one face at ultimate and in service: As = (M / z + N / 2) / f. */
+function demand(moments: SlabMoments, thicknessM: number, slab: SlabCase, standard: LoadStandard): BarDemand {
+  const { standard: id, tie = noTie } = slab;
   const { uls } = standard.factors;
   const ultimate =
     uls.permanent * moments.permanent +
@@ -106,8 +107,8 @@ function demand(moments: SlabMoments, thicknessM: number, id: StandardId, standa
   const effective = thicknessM - slabData.barAxisM.value;
   const lever = slabData.leverRatio.value * effective;
   const areaM2 = Math.max(
-    ultimate / (lever * barDesignMPa(id) * 1e3),
-    service / (lever * slabData.serviceStressMPa[id] * 1e3),
+    (ultimate / lever + tie.ultimateKNm / 2) / (barDesignMPa(id) * 1e3),
+    (service / lever + tie.serviceKNm / 2) / (slabData.serviceStressMPa[id] * 1e3),
   );
   return { momentKNm: ultimate, areaM2, ratio: areaM2 / effective };
 }

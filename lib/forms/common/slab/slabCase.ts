@@ -13,4 +13,6 @@ export interface SlabCase {
   readonly continuous: boolean;
   /** Same thickness from line to line and in the overhang (level soffit); otherwise thicker over the lines. */
   readonly uniform: boolean;
+  /** Tension that the slab carries in the direction of its span besides bending, half in each face, kN per m; none when absent. */
+  readonly tie?: { readonly serviceKNm: number; readonly ultimateKNm: number };
 }
