@@ -36,13 +36,15 @@ export const compositeBox: FormModule = {
 /** @throws RangeError for spans, depth or widths that are not possible */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
-  // Leaning webs save bottom plate and bring the bearings together: where one of them would lift the webs stand up.
-  let design = sizeWith(task, LEANS[0]);
+  // Leaning webs save bottom plate and bring the bearings together: where a bearing would lift, or the narrower plate is
+  // not enough, the webs stand up as far as it takes.
+  let best = sizeWith(task, LEANS[0]);
   for (const lean of LEANS.slice(1)) {
-    if (!design.checks.some(({ id, utilisation }) => id === 'bearing-uplift' && utilisation > 1)) break;
-    design = sizeWith(task, lean);
+    if (best.limitingCheck.utilisation <= 1) break;
+    const next = sizeWith(task, lean);
+    if (next.limitingCheck.utilisation < best.limitingCheck.utilisation) best = next;
   }
-  return design;
+  return best;
 }
 
 function sizeWith(task: UnitTask, lean: number): Design {

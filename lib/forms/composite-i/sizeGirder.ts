@@ -160,20 +160,26 @@ function thickened(
   const next = { ...run, webM: web ? run.webM.map((t, e) => Math.max(t, webNeed[e]!)) : run.webM };
   const needs = flangeNeeds(model, next, moments, equivalentKNm, fatigueMPa);
   const topWidthM = top ? widened(model, needs.top, run.topWidthM, topUse) : run.topWidthM;
-  const bottomWidthM = bottom ? widened(model, needs.bottom, run.bottomWidthM, bottomUse) : run.bottomWidthM;
+  // The bottom plate of a box is as wide as the box.
+  const bottomWidthM = model.plate
+    ? run.bottomWidthM
+    : Math.max(
+        topWidthM,
+        bottom ? widened(model, needs.bottom, run.bottomWidthM, bottomUse) : run.bottomWidthM,
+      );
   return {
     ...next,
     topWidthM,
-    bottomWidthM: Math.max(bottomWidthM, topWidthM),
+    bottomWidthM,
     topM: top ? steppedFlange(model, needs.top, topWidthM, run.topM) : run.topM,
     bottomM: bottom ? steppedFlange(model, needs.bottom, bottomWidthM, run.bottomM) : run.bottomM,
   };
 }
 
-/** Width of a flange whose thickest plate is not enough, m: wider by what it lacks; that of a box is given. */
+/** Width of a flange whose thickest plate is not enough, m: wider by what it lacks. */
 function widened(model: GirderModel, needM: Float64Array, widthM: number, use: number): number {
   const enough = needM.every((t) => t < thickestPlateM(model.standardId) - 1e-9);
-  if (enough || model.plate) return widthM;
+  if (enough) return widthM;
   return Math.max(widthM, Math.min(compositeData.flange.mostWidthM, roundWidthUp(widthM * use)));
 }
 

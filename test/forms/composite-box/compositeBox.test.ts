@@ -78,6 +78,14 @@ describe('compositeBox.size()', () => {
     expect(compositeBox.size(tubTask([48, 60, 48], 2.6, { widthM: 18 })).figures.boxes).toBe(2);
   });
 
+  it('stands its webs up and widens its top flanges before it gives up', () => {
+    // Two boxes of 120 m span: the bottom plates between leaning webs would be 2.1 m wide, and 120 mm of them not enough.
+    const wide = compositeBox.size(tubTask([96, 120, 96], 4.8, { widthM: 17 }));
+    expect(wide.limitingCheck.utilisation).toBeLessThanOrEqual(1);
+    const single = compositeBox.size(tubTask([96, 120, 96], 4.8, { widthM: 14 }));
+    expect(useOf(single, 'bending-piers')).toBeLessThan(1.02);
+  });
+
   it('gives up with a warning where the plates run out', () => {
     const design = compositeBox.size(tubTask([100, 130, 100], 2.6));
     expect(design.limitingCheck.utilisation).toBeGreaterThan(1);
