@@ -27,4 +27,5 @@ export type ProblemCode =
 
 /** Either the value or the problems that stopped it. */
 export type Result<T> =
-  { readonly ok: true; readonly value: T } | { readonly ok: false; readonly problems: readonly Problem[] };
+  | { readonly ok: true; readonly value: T }
+  | { readonly ok: false; readonly problems: readonly Problem[] };

@@ -51,7 +51,8 @@ export function withPier(study: Study, option: AppraisedOption, index: number, c
 
 /** What comes of something that was asked for by hand: the study, or why it cannot be had. */
 export type Changed =
-  { readonly ok: true; readonly study: Study } | { readonly ok: false; readonly why: string };
+  | { readonly ok: true; readonly study: Study }
+  | { readonly ok: false; readonly why: string };
 
 /**
  * The study with a span of a given length, m: the support at its end moves, or the one at its start where that one is locked

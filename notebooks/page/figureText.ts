@@ -24,7 +24,8 @@ export interface FigureRules {
 }
 
 export type ReadFigure =
-  { readonly ok: true; readonly value: Figure } | { readonly ok: false; readonly why: string };
+  | { readonly ok: true; readonly value: Figure }
+  | { readonly ok: false; readonly why: string };
 
 const spaces = /[\s\u2009\u202f\u00a0]/gu;
 

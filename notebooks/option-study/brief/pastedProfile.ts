@@ -30,7 +30,8 @@ function readChainage(text: string): ReturnType<typeof readFigure> {
 }
 
 type ReadLine =
-  { readonly ok: true; readonly point: ProfilePoint } | { readonly ok: false; readonly why: string };
+  | { readonly ok: true; readonly point: ProfilePoint }
+  | { readonly ok: false; readonly why: string };
 
 function readLine(line: string): ReadLine {
   const cells = columns(line);
