@@ -94,7 +94,7 @@ function judged(
 
 function shareWithin(totals: Float64Array, amount: number): number {
   let count = 0;
-  for (const total of totals) if (total <= amount) count += 1;
+  for (let k = 0; k < totals.length; k++) if (totals[k]! <= amount) count += 1;
   return count / totals.length;
 }
 

@@ -19,6 +19,8 @@ export interface Draws {
   readonly own: ReadonlyMap<string, Float64Array>;
   /** For each ground stretch, the index of the class drawn. */
   readonly ground: readonly Uint8Array[];
+  /** For each ground stretch and each of its classes, the draws in which it is of that class. */
+  readonly drawnAs: readonly (readonly Uint32Array[])[];
   /** Factor of the local error of the ground for each length of the crossing, from its start, median 1. */
   readonly localGround: readonly Float64Array[];
   /** Factor of the private model error of each form, median 1: one draw shared by all options of the form. */
@@ -51,12 +53,13 @@ export function drawDrivers(
       classes.map(({ odds }) => odds),
     ),
   );
+  const drawnAs = site.groundStretches.map(({ classes }, index) => listed(ground[index]!, classes.length));
   const { everyM, sigma } = driverData.localGround;
   const localGround = Array.from({ length: Math.floor(site.lengthM / everyM) + 1 }, (_, index) =>
     factors(sigma, count, seed, `local ground ${index}`),
   );
   const modelError = new Map(forms.map((form) => [form, modelErrors(form, count, seed)]));
-  return { count, seed, drivers, own, ground, localGround, modelError };
+  return { count, seed, drivers, own, ground, drawnAs, localGround, modelError };
 }
 
 function normals(count: number, seed: number, name: string): Float64Array {
@@ -79,6 +82,11 @@ function classesDrawn(count: number, next: () => number, odds: readonly number[]
     C[k] = index;
   }
   return C;
+}
+
+/** The draws of each of a number of classes. */
+function listed(C: Uint8Array, classes: number): Uint32Array[] {
+  return Array.from({ length: classes }, (_, of) => Uint32Array.from(C.keys()).filter((k) => C[k] === of));
 }
 
 function modelErrors(form: FormId, count: number, seed: number): Float64Array {

@@ -1,5 +1,6 @@
-import type { BillPart, FormId, MeasuredLine, Spread, Support, WorkedOption } from '../model/index.ts';
+import type { BillPart, FormId, MeasuredLine, Spread, WorkedOption } from '../model/index.ts';
 import { billParts } from '../model/index.ts';
+import { addLines, addLinesIn } from './addLines.ts';
 import type { Draws } from './drawDrivers.ts';
 import type { RateDraws } from './drawRates.ts';
 import { driverData } from './drivers.ts';
@@ -42,41 +43,35 @@ export function priceOption(
     if (found === undefined) parts.set(part, (found = new Float64Array(n)));
     return found;
   };
-  const F = new Float64Array(n);
   for (const group of groupLines(option)) {
-    const P = partOf(group.part);
-    const factor = factorOf(group, option, draws);
-    F.fill(0);
-    addLines(factor === null ? P : F, [...group.items.values()], ratesOf(rates, group.items));
-    if (factor !== null) addProduct(P, F, factor);
+    const { part, items } = group;
+    addLines(partOf(part), factorOf(group, option, draws), [...items.values()], ratesOf(rates, items));
   }
   const first = option.supports[0]?.chainageM ?? 0;
   for (const support of option.supports) {
-    const C = draws.ground[support.stretch];
+    const drawn = draws.drawnAs[support.stretch];
     const L = draws.localGround[Math.floor((support.chainageM - first) / driverData.localGround.everyM)];
-    if (C === undefined || L === undefined) {
+    if (drawn === undefined || L === undefined) {
       throw new RangeError(
         `support at ${support.chainageM} m: expected a place on the crossing that was drawn, received stretch ${support.stretch}`,
       );
     }
-    for (const [part, items] of foundationItems(support)) {
-      F.fill(0);
-      addByClass(F, [...items.values()], C, ratesOf(rates, items));
-      addProduct(partOf(part), F, L);
-    }
-  }
-  if (privateError !== null) {
-    for (const P of parts.values()) multiply(P, privateError);
+    support.foundations.forEach(({ lines }, ground) => {
+      for (const [part, items] of itemsByPart(lines))
+        addLinesIn(drawn[ground]!, partOf(part), L, [...items.values()], ratesOf(rates, items));
+    });
   }
   const totals = new Float64Array(n);
   for (const part of billParts) {
     const P = parts.get(part);
-    if (P !== undefined) addTimes(totals, 1, P);
+    if (P === undefined) continue;
+    if (privateError !== null) multiply(P, privateError);
+    addTo(totals, 1, P);
   }
   const [p10, q1, p50, q3, p90] = quantilesOf(totals, [0.1, 0.25, 0.5, 0.75, 0.9]) as Quantiles;
   const approaches = parts.get('approaches');
-  const without = Float64Array.from(totals);
-  if (approaches !== undefined) addTimes(without, -1, approaches);
+  const without = approaches === undefined ? totals : totals.slice();
+  if (approaches !== undefined) addTo(without, -1, approaches);
   return {
     totals,
     cost: { p10, p50, p90 },
@@ -85,62 +80,19 @@ export function priceOption(
       const P = parts.get(part);
       return P === undefined ? [] : [{ part, p50: quantileOf(P, 0.5) }];
     }),
-    withoutApproachesP50: quantileOf(without, 0.5),
+    withoutApproachesP50: approaches === undefined ? p50 : quantileOf(without, 0.5),
   };
 }
 
-/** T + quantity R in each draw. */
-function addTimes(T: Float64Array, quantity: number, R: Float64Array): void {
-  for (let k = 0; k < T.length; k++) T[k] = T[k]! + quantity * R[k]!;
-}
-
-/** T + A B in each draw. */
-function addProduct(T: Float64Array, A: Float64Array, B: Float64Array): void {
-  for (let k = 0; k < T.length; k++) T[k] = T[k]! + A[k]! * B[k]!;
+/** T + P or T - P in each draw. */
+function addTo(T: Float64Array, sign: 1 | -1, P: Float64Array): void {
+  for (let k = 0; k < T.length; k++) T[k] = T[k]! + sign * P[k]!;
 }
 
 /** T times A in each draw. */
 function multiply(T: Float64Array, A: Float64Array): void {
   for (let k = 0; k < T.length; k++) T[k] = T[k]! * A[k]!;
 }
-
-/** Lines added in one pass over the draws: what is added to is read and written once for four. */
-const TOGETHER = 4;
-
-/** T + the sum of quantities times their rates in each draw, in the order given. */
-function addLines(T: Float64Array, quantities: readonly number[], rates: readonly Float64Array[]): void {
-  let at = 0;
-  for (; at + TOGETHER <= rates.length; at += TOGETHER) {
-    const [a, b, c, d] = quantities.slice(at, at + TOGETHER) as Four<number>;
-    const [A, B, C, D] = rates.slice(at, at + TOGETHER) as Four<Float64Array>;
-    for (let k = 0; k < T.length; k++) T[k] = T[k]! + a * A[k]! + b * B[k]! + c * C[k]! + d * D[k]!;
-  }
-  for (; at < rates.length; at++) addTimes(T, quantities[at]!, rates[at]!);
-}
-
-/** The same where each quantity is that of the ground class drawn. */
-function addByClass(
-  T: Float64Array,
-  byClass: readonly Float64Array[],
-  drawnClass: Uint8Array,
-  rates: readonly Float64Array[],
-): void {
-  let at = 0;
-  for (; at + TOGETHER <= rates.length; at += TOGETHER) {
-    const [a, b, c, d] = byClass.slice(at, at + TOGETHER) as Four<Float64Array>;
-    const [A, B, C, D] = rates.slice(at, at + TOGETHER) as Four<Float64Array>;
-    for (let k = 0; k < T.length; k++) {
-      const on = drawnClass[k]!;
-      T[k] = T[k]! + a[on]! * A[k]! + b[on]! * B[k]! + c[on]! * C[k]! + d[on]! * D[k]!;
-    }
-  }
-  for (; at < rates.length; at++) {
-    const [a, A] = [byClass[at]!, rates[at]!];
-    for (let k = 0; k < T.length; k++) T[k] = T[k]! + a[drawnClass[k]!]! * A[k]!;
-  }
-}
-
-type Four<T> = [T, T, T, T];
 
 type Quantiles = [p10: number, q1: number, p50: number, q3: number, p90: number];
 
@@ -190,18 +142,14 @@ function factorOf(group: Group, option: Priceable, draws: Draws): Float64Array |
   return F;
 }
 
-/** Quantities of the foundations of a support by part and item, one for each class its ground may turn out to be. */
-function foundationItems(support: Support): Map<BillPart, Map<string, Float64Array>> {
-  const parts = new Map<BillPart, Map<string, Float64Array>>();
-  support.foundations.forEach((foundation, index) => {
-    for (const { part, item, quantity } of foundation.lines) {
-      let items = parts.get(part);
-      if (items === undefined) parts.set(part, (items = new Map<string, Float64Array>()));
-      let byClass = items.get(item);
-      if (byClass === undefined) items.set(item, (byClass = new Float64Array(support.foundations.length)));
-      byClass[index] = byClass[index]! + quantity;
-    }
-  });
+/** Quantities of measured lines by part of the bill and item. */
+function itemsByPart(lines: readonly MeasuredLine[]): Map<BillPart, Map<string, number>> {
+  const parts = new Map<BillPart, Map<string, number>>();
+  for (const { part, item, quantity } of lines) {
+    let items = parts.get(part);
+    if (items === undefined) parts.set(part, (items = new Map<string, number>()));
+    items.set(item, (items.get(item) ?? 0) + quantity);
+  }
   return parts;
 }
 

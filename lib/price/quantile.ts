@@ -1,5 +1,7 @@
 /** Bins into which the values are counted: a few values fall into each. */
 const BINS = 1024;
+/** Every so-manieth value is looked at for the range of the bins. */
+const SAMPLED = 8;
 
 /**
  * Quantiles of draws at the shares `ps`, linear between order statistics at p (n - 1); 0 <= p <= 1. The values are counted
@@ -9,48 +11,41 @@ const BINS = 1024;
 export function quantilesOf(values: Float64Array, ps: readonly number[]): number[] {
   const n = values.length;
   if (n === 0) throw new RangeError('quantile: expected at least one draw, received none');
-  let low = values[0]!;
-  let high = low;
-  for (let k = 1; k < n; k++) {
-    const value = values[k]!;
-    if (value < low) low = value;
-    if (value > high) high = value;
+  // Bins reach over a sample of the values; what lies outside falls into the first and the last.
+  let low = Infinity;
+  let high = -Infinity;
+  for (let k = 0; k < n; k += SAMPLED) {
+    low = Math.min(low, values[k]!);
+    high = Math.max(high, values[k]!);
   }
-  // The largest value alone falls into one bin more.
   const perUnit = high > low ? BINS / (high - low) : 0;
   const binOf = new Uint16Array(n);
-  const counts = new Uint32Array(BINS + 1);
+  // Where each bin begins in the order; while counting, one place further on.
+  const begins = new Int32Array(BINS + 2);
   for (let k = 0; k < n; k++) {
-    const bin = ((values[k]! - low) * perUnit) | 0;
+    const bin = Math.max(0, Math.min(BINS, (values[k]! - low) * perUnit)) | 0;
     binOf[k] = bin;
-    counts[bin] = counts[bin]! + 1;
+    begins[bin + 1] = begins[bin + 1]! + 1;
   }
+  for (let bin = 0; bin <= BINS; bin++) begins[bin + 1] = begins[bin + 1]! + begins[bin]!;
 
-  /** The bin a place in the order falls into, and how many values are in the bins before it. */
-  const binAt = (place: number): readonly [bin: number, before: number] => {
-    let before = 0;
-    let bin = 0;
-    while (before + counts[bin]! <= place) before += counts[bin++]!;
-    return [bin, before];
-  };
-  const inside = new Map<number, Float64Array>();
-  const sorted = (bin: number): Float64Array => {
-    let found = inside.get(bin);
-    if (found === undefined) {
-      found = new Float64Array(counts[bin]!);
-      for (let k = 0, next = 0; next < found.length; k++) if (binOf[k] === bin) found[next++] = values[k]!;
-      inside.set(bin, found.sort());
-    }
-    return found;
-  };
-  const smallest = (place: number): number => {
-    const [bin, before] = binAt(place);
-    return sorted(bin)[place - before]!;
-  };
-  return ps.map((p) => {
-    const at = p * (n - 1);
-    const below = smallest(Math.floor(at));
-    return below + (at - Math.floor(at)) * (smallest(Math.ceil(at)) - below);
+  const asked = new Uint8Array(BINS + 1);
+  const places = ps.map((p) => p * (n - 1));
+  let bin = 0;
+  for (const place of places.flatMap((at) => [Math.floor(at), Math.ceil(at)]).sort((a, b) => a - b)) {
+    while (begins[bin + 1]! <= place) bin++;
+    asked[bin] = 1;
+  }
+  const order = new Float64Array(n);
+  const next = begins.slice();
+  for (let k = 0; k < n; k++) {
+    const of = binOf[k]!;
+    if (asked[of] === 1) order[next[of]!++] = values[k]!;
+  }
+  for (let of = 0; of <= BINS; of++) if (asked[of] === 1) order.subarray(begins[of], begins[of + 1]).sort();
+  return places.map((at) => {
+    const below = order[Math.floor(at)]!;
+    return below + (at - Math.floor(at)) * (order[Math.ceil(at)]! - below);
   });
 }
 

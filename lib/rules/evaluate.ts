@@ -47,6 +47,41 @@ function compare(left: FactValue, is: Comparator, right: FactValue): Truth {
   return left >= right;
 }
 
+/** Kleene's strong logic: settled as soon as one part is, unknown if the rest hangs on something unknown. */
+function truthOfParts(parts: readonly Condition[], settling: boolean, facts: Facts): Truth {
+  let truth: Truth = !settling;
+  for (const part of parts) {
+    const one = truthOf(part, facts);
+    if (one === settling) return settling;
+    if (one === 'unknown') truth = 'unknown';
+  }
+  return truth;
+}
+
+/**
+ * Whether a condition holds on facts, and nothing else: most rules are silent, and that is known without their tree.
+ *
+ * @param facts values by fact id; absent, NaN and `'unknown'` are unknown
+ */
+export function truthOf(condition: Condition, facts: Facts): Truth {
+  if ('all' in condition) return truthOfParts(condition.all, false, facts);
+  if ('any' in condition) return truthOfParts(condition.any, true, facts);
+  if ('not' in condition) {
+    const truth = truthOf(condition.not, facts);
+    return truth === 'unknown' ? 'unknown' : !truth;
+  }
+  const received = factValue(facts, condition.fact);
+  if ('between' in condition) {
+    const [least, most] = condition.between;
+    return typeof received === 'number' ? received >= least && received <= most : 'unknown';
+  }
+  return compare(
+    received,
+    condition.is,
+    'than' in condition ? factValue(facts, condition.than) : condition.value,
+  );
+}
+
 function missingOf(
   ...named: readonly (readonly [id: string, value: FactValue])[]
 ): ReadonlyMap<string, number> {
@@ -78,21 +113,16 @@ function sumOf(nodes: readonly Evaluated[]): ReadonlyMap<string, number> {
  * @param facts values by fact id; absent, NaN and `'unknown'` are unknown
  */
 export function evaluate(condition: Condition, facts: Facts): Evaluated {
+  const truth = truthOf(condition, facts);
   if ('all' in condition || 'any' in condition) {
     const isAll = 'all' in condition;
     const parts = (isAll ? condition.all : condition.any).map((part) => evaluate(part, facts));
-    const settling = !isAll;
-    const truth: Truth = parts.some((part) => part.truth === settling)
-      ? settling
-      : parts.some((part) => part.truth === 'unknown')
-        ? 'unknown'
-        : !settling;
     const decoration: Decoration = { truth, missing: truth === 'unknown' ? sumOf(parts) : nothing };
     return isAll ? { all: parts, ...decoration } : { any: parts, ...decoration };
   }
   if ('not' in condition) {
     const part = evaluate(condition.not, facts);
-    return { not: part, truth: part.truth === 'unknown' ? 'unknown' : !part.truth, missing: part.missing };
+    return { not: part, truth, missing: part.missing };
   }
   const received = factValue(facts, condition.fact);
   if ('between' in condition) {
@@ -102,7 +132,7 @@ export function evaluate(condition: Condition, facts: Facts): Evaluated {
     return {
       ...condition,
       received,
-      truth: typeof received === 'number' ? received >= least && received <= most : 'unknown',
+      truth,
       missing: missingOf([condition.fact, received]),
       distance:
         toLeast === null || toMost === null ? null : Math.abs(toLeast) <= Math.abs(toMost) ? toLeast : toMost,
@@ -114,7 +144,7 @@ export function evaluate(condition: Condition, facts: Facts): Evaluated {
       ...condition,
       received,
       limit,
-      truth: compare(received, condition.is, limit),
+      truth,
       missing: missingOf([condition.fact, received], [condition.than, limit]),
       distance: distanceTo(received, limit),
     };
@@ -122,7 +152,7 @@ export function evaluate(condition: Condition, facts: Facts): Evaluated {
   return {
     ...condition,
     received,
-    truth: compare(received, condition.is, condition.value),
+    truth,
     missing: missingOf([condition.fact, received]),
     distance: distanceTo(received, condition.value),
   };

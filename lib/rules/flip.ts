@@ -1,5 +1,5 @@
 import type { Facts, Flip } from '../model/index.ts';
-import { evaluate, factValue } from './evaluate.ts';
+import { factValue, truthOf } from './evaluate.ts';
 import { fact as factById } from './book.ts';
 import { factsIn, limitsOn } from './limitsOn.ts';
 import type { Condition } from './rule.ts';
@@ -40,9 +40,11 @@ export function nearestChange(
       .flatMap((limit) => [limit, tidy(limit - step), tidy(limit + step)])
       .filter((to) => to !== from)
       .sort((a, b) => Math.abs(a - from) - Math.abs(b - from));
+    const changed: Record<string, Facts[string]> = { ...facts };
     // Of one fact the nearest value, of several facts the one that changes by the least share of itself.
     const to = changes.find((value) => {
-      const then = outcome({ ...facts, [id]: value });
+      changed[id] = value;
+      const then = outcome(changed);
       return then !== undefined && then !== now;
     });
     if (to === undefined || !(size(from, to) < least)) continue;
@@ -59,7 +61,7 @@ export function nearestChange(
  */
 export function flip(condition: Condition, facts: Facts): Flip | undefined {
   return nearestChange([condition], facts, (changed) => {
-    const { truth } = evaluate(condition, changed);
+    const truth = truthOf(condition, changed);
     return truth === 'unknown' ? undefined : truth;
   });
 }

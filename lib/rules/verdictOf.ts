@@ -1,5 +1,5 @@
 import type { Effect, Facts } from '../model/index.ts';
-import { evaluate, type Evaluated } from './evaluate.ts';
+import { evaluate, truthOf, type Evaluated } from './evaluate.ts';
 import type { Condition, Rule } from './rule.ts';
 
 /** `when` and condition of a rule as one tree: where it is true the rule applies. */
@@ -16,12 +16,13 @@ export interface Verdict {
   readonly node: Evaluated;
 }
 
-/** The verdict of a rule on facts; null where it is silent. */
+/** The verdict of a rule on facts; null where it is silent, as most are: that is known before any tree is decorated. */
 export function verdictOf(rule: Rule, facts: Facts): Verdict | null {
-  const node = evaluate(wholeCondition(rule), facts);
-  if (node.truth === 'unknown') return { effect: 'to confirm', template: null, node };
-  if (node.truth) return { effect: rule.effect, template: rule.reason, node };
   const { otherwise, when } = rule;
-  if (otherwise === undefined || (when !== undefined && evaluate(when, facts).truth !== true)) return null;
-  return { effect: otherwise.effect, template: otherwise.reason, node };
+  const whole = wholeCondition(rule);
+  const truth = truthOf(whole, facts);
+  if (truth === 'unknown') return { effect: 'to confirm', template: null, node: evaluate(whole, facts) };
+  if (truth) return { effect: rule.effect, template: rule.reason, node: evaluate(whole, facts) };
+  if (otherwise === undefined || (when !== undefined && truthOf(when, facts) !== true)) return null;
+  return { effect: otherwise.effect, template: otherwise.reason, node: evaluate(whole, facts) };
 }

@@ -1,6 +1,6 @@
 import type { Effect, Facts, FormId, MethodId } from '../model/index.ts';
 import { rulesFor } from './book.ts';
-import { evaluate } from './evaluate.ts';
+import { truthOf } from './evaluate.ts';
 import { factsIn, limitsOn } from './limitsOn.ts';
 import type { Rule } from './rule.ts';
 import { wholeCondition } from './verdictOf.ts';
@@ -10,7 +10,7 @@ export type Interval = readonly [least: number, most: number];
 
 /** Whether a rule leaves a value of a fact open: a barring rule must not hold there, a favouring one must. */
 function leavesOpen(rule: Rule, facts: Facts): boolean {
-  const { truth } = evaluate(wholeCondition(rule), facts);
+  const truth = truthOf(wholeCondition(rule), facts);
   return rule.effect === 'in favour' ? truth === true : truth !== true;
 }
 
