@@ -1,11 +1,14 @@
 import type { BillPart, FormId, MeasuredLine, Spread, WorkedOption } from '../model/index.ts';
 import { billParts } from '../model/index.ts';
-import { addLines, addLinesIn } from './addLines.ts';
+import { addLines, type Sum } from './addLines.ts';
 import type { Draws } from './drawDrivers.ts';
 import type { RateDraws } from './drawRates.ts';
 import { driverData } from './drivers.ts';
 import { quantileOf, quantilesOf } from './quantile.ts';
 import { halfSigmas } from './rates.ts';
+
+/** Draws priced at a time: their rates are then near at hand for every line. */
+const BLOCK = 1000;
 
 /** What an option costs on the draws of the study, money. */
 export interface PricedOption {
@@ -43,10 +46,14 @@ export function priceOption(
     if (found === undefined) parts.set(part, (found = new Float64Array(n)));
     return found;
   };
-  for (const group of groupLines(option)) {
-    const { part, items } = group;
-    addLines(partOf(part), factorOf(group, option, draws), [...items.values()], ratesOf(rates, items));
-  }
+  const ones = new Float64Array(n).fill(1);
+  const sums: Sum[] = groupLines(option).map((group) => ({
+    to: partOf(group.part),
+    factor: factorOf(group, option, draws) ?? ones,
+    draws: null,
+    quantities: [...group.items.values()],
+    rates: ratesOf(rates, group.items),
+  }));
   const first = option.supports[0]?.chainageM ?? 0;
   for (const support of option.supports) {
     const drawn = draws.drawnAs[support.stretch];
@@ -58,20 +65,24 @@ export function priceOption(
     }
     support.foundations.forEach(({ lines }, ground) => {
       for (const [part, items] of itemsByPart(lines))
-        addLinesIn(drawn[ground]!, partOf(part), L, [...items.values()], ratesOf(rates, items));
+        sums.push({
+          to: partOf(part),
+          factor: L,
+          draws: drawn[ground]!,
+          quantities: [...items.values()],
+          rates: ratesOf(rates, items),
+        });
     });
   }
+  const inOrder = billParts.flatMap((part) => parts.get(part) ?? []);
   const totals = new Float64Array(n);
-  for (const part of billParts) {
-    const P = parts.get(part);
-    if (P === undefined) continue;
-    if (privateError !== null) multiply(P, privateError);
-    addTo(totals, 1, P);
+  for (let from = 0; from < n; from += BLOCK) {
+    const to = Math.min(n, from + BLOCK);
+    for (const sum of sums) addLines(sum, from, to);
+    for (const P of inOrder) addWithError(totals, P, privateError ?? ones, from, to);
   }
   const [p10, q1, p50, q3, p90] = quantilesOf(totals, [0.1, 0.25, 0.5, 0.75, 0.9]) as Quantiles;
   const approaches = parts.get('approaches');
-  const without = approaches === undefined ? totals : totals.slice();
-  if (approaches !== undefined) addTo(without, -1, approaches);
   return {
     totals,
     cost: { p10, p50, p90 },
@@ -80,18 +91,24 @@ export function priceOption(
       const P = parts.get(part);
       return P === undefined ? [] : [{ part, p50: quantileOf(P, 0.5) }];
     }),
-    withoutApproachesP50: approaches === undefined ? p50 : quantileOf(without, 0.5),
+    withoutApproachesP50: approaches === undefined ? p50 : quantileOf(less(totals, approaches), 0.5),
   };
 }
 
-/** T + P or T - P in each draw. */
-function addTo(T: Float64Array, sign: 1 | -1, P: Float64Array): void {
-  for (let k = 0; k < T.length; k++) T[k] = T[k]! + sign * P[k]!;
+/** P times its error, and that added to T, in each draw from `from` to before `to`. */
+function addWithError(T: Float64Array, P: Float64Array, error: Float64Array, from: number, to: number): void {
+  for (let k = from; k < to; k++) {
+    const cost = P[k]! * error[k]!;
+    P[k] = cost;
+    T[k] = T[k]! + cost;
+  }
 }
 
-/** T times A in each draw. */
-function multiply(T: Float64Array, A: Float64Array): void {
-  for (let k = 0; k < T.length; k++) T[k] = T[k]! * A[k]!;
+/** T - P in each draw. */
+function less(T: Float64Array, P: Float64Array): Float64Array {
+  const L = new Float64Array(T.length);
+  for (let k = 0; k < L.length; k++) L[k] = T[k]! - P[k]!;
+  return L;
 }
 
 type Quantiles = [p10: number, q1: number, p50: number, q3: number, p90: number];
@@ -137,7 +154,7 @@ function factorOf(group: Group, option: Priceable, draws: Draws): Float64Array |
   }
   if (!group.monthly) return null;
   const { low, high } = halfSigmas(option.months);
-  const F = Float64Array.from(draws.drivers.productivity);
+  const F = draws.drivers.productivity.slice();
   for (let k = 0; k < F.length; k++) F[k] = Math.exp((F[k]! < 0 ? low : high) * F[k]!);
   return F;
 }

@@ -3,6 +3,13 @@ const BINS = 1024;
 /** Every so-manieth value is looked at for the range of the bins. */
 const SAMPLED = 8;
 
+/** Scratch: the bin of each value, where each bin begins in the order, the bins asked for, values at their places in the order. */
+let binOf = new Uint16Array(0);
+let order = new Float64Array(0);
+const begins = new Int32Array(BINS + 2);
+const next = new Int32Array(BINS + 2);
+const asked = new Uint8Array(BINS + 1);
+
 /**
  * Quantiles of draws at the shares `ps`, linear between order statistics at p (n - 1); 0 <= p <= 1. The values are counted
  * into bins and only those in the bins asked for are sorted, which is several times quicker than selection and exact.
@@ -11,42 +18,65 @@ const SAMPLED = 8;
 export function quantilesOf(values: Float64Array, ps: readonly number[]): number[] {
   const n = values.length;
   if (n === 0) throw new RangeError('quantile: expected at least one draw, received none');
-  // Bins reach over a sample of the values; what lies outside falls into the first and the last.
+  if (binOf.length < n) {
+    binOf = new Uint16Array(n);
+    order = new Float64Array(n);
+  }
+  countIntoBins(values);
+  asked.fill(0);
+  for (const p of ps) {
+    asked[binAt(Math.floor(p * (n - 1)))] = 1;
+    asked[binAt(Math.ceil(p * (n - 1)))] = 1;
+  }
+  collectAsked(values);
+  for (let bin = 0; bin <= BINS; bin++)
+    if (asked[bin] === 1) order.subarray(begins[bin], begins[bin + 1]).sort();
+  return ps.map((p) => {
+    const at = p * (n - 1);
+    const below = order[Math.floor(at)]!;
+    return below + (at - Math.floor(at)) * (order[Math.ceil(at)]! - below);
+  });
+}
+
+/** Bins reach over a sample of the values; what lies outside falls into the first and the last. */
+function countIntoBins(values: Float64Array): void {
   let low = Infinity;
   let high = -Infinity;
-  for (let k = 0; k < n; k += SAMPLED) {
+  for (let k = 0; k < values.length; k += SAMPLED) {
     low = Math.min(low, values[k]!);
     high = Math.max(high, values[k]!);
   }
   const perUnit = high > low ? BINS / (high - low) : 0;
-  const binOf = new Uint16Array(n);
-  // Where each bin begins in the order; while counting, one place further on.
-  const begins = new Int32Array(BINS + 2);
-  for (let k = 0; k < n; k++) {
+  const [bins, counts] = [binOf, begins];
+  counts.fill(0);
+  for (let k = 0; k < values.length; k++) {
     const bin = Math.max(0, Math.min(BINS, (values[k]! - low) * perUnit)) | 0;
-    binOf[k] = bin;
-    begins[bin + 1] = begins[bin + 1]! + 1;
+    bins[k] = bin;
+    counts[bin + 1] = counts[bin + 1]! + 1;
   }
-  for (let bin = 0; bin <= BINS; bin++) begins[bin + 1] = begins[bin + 1]! + begins[bin]!;
+  for (let bin = 0; bin <= BINS; bin++) counts[bin + 1] = counts[bin + 1]! + counts[bin]!;
+}
 
-  const asked = new Uint8Array(BINS + 1);
-  const places = ps.map((p) => p * (n - 1));
-  let bin = 0;
-  for (const place of places.flatMap((at) => [Math.floor(at), Math.ceil(at)]).sort((a, b) => a - b)) {
-    while (begins[bin + 1]! <= place) bin++;
-    asked[bin] = 1;
+/** The bin that holds a place in the order. */
+function binAt(place: number): number {
+  let low = 0;
+  let high = BINS;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (begins[middle + 1]! > place) high = middle;
+    else low = middle + 1;
   }
-  const order = new Float64Array(n);
-  const next = begins.slice();
-  for (let k = 0; k < n; k++) {
-    const of = binOf[k]!;
-    if (asked[of] === 1) order[next[of]!++] = values[k]!;
+  return low;
+}
+
+/** Values of the bins asked for, each bin at its places in the order. */
+function collectAsked(values: Float64Array): void {
+  const [bins, sorted] = [binOf, order];
+  next.set(begins);
+  for (let k = 0; k < values.length; k++) {
+    const bin = bins[k]!;
+    if (asked[bin] === 1) sorted[next[bin]!++] = values[k]!;
   }
-  for (let of = 0; of <= BINS; of++) if (asked[of] === 1) order.subarray(begins[of], begins[of + 1]).sort();
-  return places.map((at) => {
-    const below = order[Math.floor(at)]!;
-    return below + (at - Math.floor(at)) * (order[Math.ceil(at)]! - below);
-  });
 }
 
 /** One quantile; see `quantilesOf`. */
