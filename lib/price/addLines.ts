@@ -61,8 +61,7 @@ function addAll(
   from: number,
   to: number,
 ): void {
-  for (let k = from; k < to; k++)
-    T[k] = T[k]! + factor[k]! * (a * A[k]! + b * B[k]! + c * C[k]! + d * D[k]!);
+  for (let k = from; k < to; k++) T[k] = T[k]! + factor[k]! * (a * A[k]! + b * B[k]! + c * C[k]! + d * D[k]!);
 }
 
 function addIn(
