@@ -1,5 +1,6 @@
 import { faultsOf } from '../arrange/index.ts';
 import type { AppraisedOption, Option, Study, Unit } from '../model/index.ts';
+import { siteOf } from '../site/index.ts';
 import { appraiseOptionAt } from './appraiseOption.ts';
 import { drawn } from './drawn.ts';
 import { between, BEYOND_ABUTMENT } from './keptUnits.ts';
@@ -41,12 +42,13 @@ export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory
   const { number, form, method } = own ?? before;
   const units = between(site, (own ?? before).units);
   if (units === null) return { option: null, faults: [BEYOND_ABUTMENT] };
+  const ownSite = siteOf(site, units);
   const depthsM = depthsOf(units, before, own?.depthM ?? null);
   const depthM = depthsM[units.indexOf(mainUnit(units))]!;
   const variant = own?.variant ?? before.variant ?? {};
   const option: Option = { number, form, method, units, depthM, variant, origin: 'kept' };
   const onDraws = drawn(bench, [...new Set(units.map((unit) => unit.form))]);
-  const faults = faultsOf(units, requestFor(option, site, patternOf(form, units)), site);
+  const faults = faultsOf(units, requestFor(option, ownSite, patternOf(form, units)), ownSite);
   try {
     return { option: appraiseOptionAt(bench, onDraws, option, depthsM).option, faults };
   } catch (error) {

@@ -13,7 +13,7 @@ import { hundredMm } from './hundredMm.ts';
 import type { Work } from './work.ts';
 import { workOption } from './cheapestOption.ts';
 import { mainUnit, spareOf, workOptionAt, type Worked } from './workOption.ts';
-import type { Workbench } from './workbench.ts';
+import { benchFor, type Workbench } from './workbench.ts';
 
 /** An option worked out, priced and ruled on, with its cost in every draw. */
 export interface PricedAppraisal {
@@ -28,7 +28,8 @@ export interface PricedAppraisal {
  * @throws RangeError where a form cannot be sized for what it is asked
  */
 export function* appraiseOption(bench: Workbench, drawn: Drawn, option: Option): Work<PricedAppraisal> {
-  return judged(bench, drawn, yield* workOption(bench, option));
+  const own = benchFor(bench, option.units);
+  return judged(own, drawn, yield* workOption(own, option));
 }
 
 /**
@@ -42,10 +43,11 @@ export function appraiseOptionAt(
   option: Option,
   depthsM: readonly number[],
 ): PricedAppraisal {
-  return judged(bench, drawn, workOptionAt(bench, option, depthsM));
+  const own = benchFor(bench, option.units);
+  return judged(own, drawn, workOptionAt(own, option, depthsM));
 }
 
-/** A worked option priced and ruled on. */
+/** A worked option priced and ruled on; the bench is that of its own abutments. */
 function judged(
   bench: Workbench,
   { draws, rates, key }: Drawn,
@@ -69,6 +71,7 @@ function judged(
   return {
     option: {
       ...worked,
+      ...(site.windows ? { startM: site.startM, endM: site.endM } : {}),
       status,
       rulings,
       faults: faultsOf(worked.units, requestFor(worked, site), site),

@@ -20,6 +20,8 @@ export interface TableShelf {
   readonly tableFor: (asked: FormAndMethod) => CostTable;
   /** The rows that the table of one form is read off: its own and those of its approaches. */
   readonly rowsOf: (asked: FormAndMethod) => readonly TrialRows[];
+  /** What a support of a form carries for each metre of the spans beside it, permanent and traffic together, kN/m. */
+  readonly loadKNm: (asked: FormAndMethod, form: FormId, governingM: number) => number;
   /** Longest side span over a main span, m, with which the back-stays of a unit on two pylons stay taut. */
   readonly tautSide: (asked: FormAndMethod, mainM: number) => number;
 }
@@ -77,13 +79,16 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
       },
     };
   };
+  /** The row of the first trial span that is as long as a span, m, or of the longest. */
+  const rowOver = ({ spansM, row }: TrialRows, longM: number): TrialRow => {
+    const next = spansM.findIndex((spanM) => spanM >= longM);
+    return row(next < 0 ? spansM.length - 1 : next);
+  };
   return {
     tableFor,
-    tautSide(asked, mainM) {
-      const { spansM, row } = rowsFor(asked);
-      const next = spansM.findIndex((spanM) => spanM >= mainM);
-      return row(next < 0 ? spansM.length - 1 : next).tautSide;
-    },
+    tautSide: (asked, mainM) => rowOver(rowsFor(asked), mainM).tautSide,
+    loadKNm: (asked, form, governingM) =>
+      rowOver(rowsFor(form === asked.form ? asked : usual(form)), governingM).loadKNm,
     rowsOf(asked) {
       const { pattern, alsoPatterns = [] } = formModule(asked.form);
       const patterns = pattern.kind === 'continuous' ? alsoPatterns : [pattern];

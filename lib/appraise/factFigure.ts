@@ -20,7 +20,7 @@ export function factsOf(at: At): Facts {
     withRatios(
       optionFacts(
         study,
-        appraisal.site,
+        at.site,
         option,
         option.headroom,
         appraisal.standing.within[option.number] ?? 'unknown',

@@ -50,7 +50,7 @@ function endRatio(spans: readonly number[]): number {
 const standing = (id: string, formula: string, isHard: boolean): Descriptor =>
   fact(id, formula, (at) => ({
     supports: supports(at),
-    zones: at.appraisal.site.zones.flatMap(({ hard }, i) =>
+    zones: at.site.zones.flatMap(({ hard }, i) =>
       hard === isHard ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
     ),
   }));
@@ -110,8 +110,8 @@ export const factFigures: readonly Descriptor[] = [
       ...mainEnds(at),
       stretches:
         id === 'falseworkOverWater'
-          ? at.appraisal.site.waters.flatMap((_, i) => [`site/waters/${i}/fromM`, `site/waters/${i}/toM`])
-          : at.appraisal.site.zones.flatMap(({ kind }, i) =>
+          ? at.site.waters.flatMap((_, i) => [`site/waters/${i}/fromM`, `site/waters/${i}/toM`])
+          : at.site.zones.flatMap(({ kind }, i) =>
               kind === 'railway' ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
             ),
     })),

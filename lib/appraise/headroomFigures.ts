@@ -8,12 +8,12 @@ const place = (at: At): number => Number(at.name('x'));
 
 /** Where a chainage at which headroom is measured comes from: an end of a limit, of the crossing, or a bend of the depth. */
 function endAt(at: At): string | null {
-  const { site } = at.appraisal;
+  const { site } = at;
   const x = place(at);
   const limit = site.soffitLimits.findIndex(({ fromM, toM }) => fromM === x || toM === x);
   if (limit >= 0)
     return `site/soffitLimits/${limit}/${site.soffitLimits[limit]!.fromM === x ? 'fromM' : 'toM'}`;
-  return x === site.startM ? 'site/startM' : x === site.endM ? 'site/endM' : null;
+  return x === site.startM ? at.ends.start : x === site.endM ? at.ends.end : null;
 }
 
 /** The unit of constant depth over a chainage, or -1 where the depth there is on a haunch. */
@@ -27,7 +27,7 @@ function levelUnitAt(at: At): number {
 
 /** Whether the depth along the deck bends at a chainage, or a support stands there. */
 const bendsAt = (at: At): boolean =>
-  depthAlong(at.appraisal.site, at.option.units, at.option.designs).xM.includes(place(at));
+  depthAlong(at.site, at.option.units, at.option.designs).xM.includes(place(at));
 
 const overPlace = (what: string): string => `options/:option/over/:x/${what}`;
 
@@ -74,7 +74,7 @@ export const headroomFigures: readonly Descriptor[] = [
     method: 'along the haunch',
     formula: 'read off the depth along the unit at this chainage',
     value: (at) => {
-      const { site } = at.appraisal;
+      const { site } = at;
       return (
         depthAt(depthAlong(site, at.option.units, at.option.designs), place(at)) -
         constructionDepth(site.deck, 0)
@@ -126,11 +126,11 @@ export const headroomFigures: readonly Descriptor[] = [
     formula: 'road level - construction depth - lowest soffit allowed',
     inputs: (at) => {
       const over = `${at.root}/over/${at.option.headroom?.chainageM ?? NaN}`;
-      const limit = spareOf(at.appraisal.site, at.option)?.limit;
+      const limit = spareOf(at.site, at.option)?.limit;
       return {
         road: `${over}/roadM`,
         depth: `${over}/depthM`,
-        limit: `site/soffitLimits/${at.appraisal.site.soffitLimits.findIndex((one) => one === limit)}/levelM`,
+        limit: `site/soffitLimits/${at.site.soffitLimits.findIndex((one) => one === limit)}/levelM`,
       };
     },
     compute: ({ road, depth, limit }) => road - depth - limit,
@@ -150,7 +150,7 @@ export const headroomFigures: readonly Descriptor[] = [
     unit: 'm2',
     method: 'product',
     formula: 'length x deck width',
-    inputs: () => ({ length: 'site/lengthM', width: 'site/deck/widthM' }),
+    inputs: (at) => ({ length: at.ends.length, width: 'site/deck/widthM' }),
     compute: ({ length, width }) => length * width,
   }),
 ];

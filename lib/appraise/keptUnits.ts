@@ -1,11 +1,22 @@
 import { formModule } from '../forms/index.ts';
+import { abutmentWindows } from '../site/index.ts';
 import type { KeptOption, Site, Unit } from '../model/index.ts';
+import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 
 export const BEYOND_ABUTMENT = 'a support would stand beyond an abutment';
 
-/** The same supports, with the abutments where the brief has them now; null where a support would lie beyond one. */
-export function between({ startM, endM }: Site, units: readonly Unit[]): Unit[] | null {
+const within = (x: number, [fromM, toM]: readonly [number, number]): number =>
+  Math.min(toM, Math.max(fromM, x));
+
+/**
+ * The same supports, with the abutments where the brief has them now, or as near to where they were as its windows leave
+ * them; null where a support would lie beyond one.
+ */
+export function between(site: Site, units: readonly Unit[]): Unit[] | null {
   const last = units.length - 1;
+  const windows = abutmentWindows(site, PIER_HALF_WIDTH_M);
+  const startM = within(units[0]!.supportsM[0]!, windows.start);
+  const endM = within(units[last]!.supportsM.at(-1)!, windows.end);
   const moved = units.map((unit, u) => ({
     ...unit,
     supportsM: unit.supportsM.map((x, i) =>

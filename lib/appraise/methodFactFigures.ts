@@ -5,11 +5,11 @@ import { halfDeckNeeded } from './methodFacts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
 
 const zones = (at: At, ...kinds: readonly string[]): string[] =>
-  at.appraisal.site.zones.flatMap(({ kind }, i) =>
+  at.site.zones.flatMap(({ kind }, i) =>
     kinds.includes(kind) ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
   );
 const limits = (at: At): string[] =>
-  at.appraisal.site.soffitLimits.flatMap(({ kind }, i) =>
+  at.site.soffitLimits.flatMap(({ kind }, i) =>
     kind === 'road' || kind === 'railway' ? [`site/soffitLimits/${i}/levelM`] : [],
   );
 
@@ -21,7 +21,7 @@ const pieceMasses = (at: At): string[] =>
     heaviestPiece === null ? [] : [`${at.root}/designs/${u}/heaviestPiece/massT`],
   );
 const ends = (at: At, kind: 'zones' | 'waters'): string[] =>
-  at.appraisal.site[kind].flatMap((_, i) => [`site/${kind}/${i}/fromM`, `site/${kind}/${i}/toM`]);
+  at.site[kind].flatMap((_, i) => [`site/${kind}/${i}/fromM`, `site/${kind}/${i}/toM`]);
 const linesPath = (at: At): string[] => {
   const lines = girderLines(at.option.designs[main(at)]!);
   return lines === undefined ? [] : [`${at.root}/designs/${main(at)}/figures/${lines.figure}`];
@@ -33,11 +33,11 @@ export const methodFactFigures: readonly Descriptor[] = [
   fact('bargeOnSite', factOf('bargeOnSite').meaning, () => ({ barge: 'brief/access/barge' })),
   fact('falseworkOverRoad', factOf('falseworkOverRoad').meaning, (at) => ({
     stretches: zones(at, 'road'),
-    ends: ['site/startM', 'site/endM'],
+    ends: [at.ends.start, at.ends.end],
   })),
   fact('railwayCrossed', factOf('railwayCrossed').meaning, (at) => ({
     stretches: zones(at, 'railway'),
-    ends: ['site/startM', 'site/endM'],
+    ends: [at.ends.start, at.ends.end],
   })),
   fact('trafficSpareM', factOf('trafficSpareM').meaning, (at) => ({
     road: [`${at.root}/profile/startLevelM`, `${at.root}/profile/endLevelM`],

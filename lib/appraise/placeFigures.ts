@@ -6,13 +6,13 @@ const over = (at: At, what: string): string => `${at.root}/over/${at.name('x')}/
 
 /** Soffit limits that reach over a chainage. */
 const limitsAt = (at: At): string[] =>
-  at.appraisal.site.soffitLimits.flatMap(({ fromM, toM }, i) =>
+  at.site.soffitLimits.flatMap(({ fromM, toM }, i) =>
     place(at) >= fromM && place(at) <= toM ? [`site/soffitLimits/${i}/levelM`] : [],
   );
 
 /** The ground points on either side of a chainage; the first or last alone beyond them. */
 function pointsBeside(at: At): readonly number[] {
-  const { groundX } = at.appraisal.site;
+  const { groundX } = at.site;
   const right = groundX.findIndex((x) => x >= place(at));
   if (right < 0) return [groundX.length - 1];
   return right === 0 || groundX[right] === place(at) ? [right] : [right - 1, right];
@@ -75,7 +75,7 @@ export const placeFigures: readonly Descriptor[] = [
       pointsBeside(at).length > 1
         ? 'straight between the ground points on either side'
         : 'level of the ground point here',
-    value: (at) => groundAt(at.appraisal.site, place(at)),
+    value: (at) => groundAt(at.site, place(at)),
     inputs: (at) => ({
       levels: pointsBeside(at).map((i) => `site/groundZ/${i}`),
       chainages: pointsBeside(at).map((i) => `site/groundX/${i}`),

@@ -3,6 +3,7 @@ import { formModule } from '../forms/index.ts';
 import type { Arrangement, FormId, MethodId, Pattern } from '../model/index.ts';
 import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
+import { overWindows, supportsOf } from './overWindows.ts';
 import { arrangementFacts } from './facts.ts';
 import type { Proposals } from './memory.ts';
 import { relaxationWords } from './relaxationWords.ts';
@@ -68,15 +69,11 @@ function patternsFor({ site, tables }: Workbench, asked: FormAndMethod): readonl
   return [pattern, ...alsoPatterns.filter(({ approach }) => openSpans(approach, site.lengthM))];
 }
 
-const supportsOf = ({ units }: Arrangement): number =>
-  units.reduce((sum, { supportsM }) => sum + supportsM.length - 1, 1);
-
 /** Options are told apart by their number of supports: the cheaper of two with as many stays. */
 const isFirstOfItsSupports = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
   all.findIndex((other) => supportsOf(other) === supportsOf(one)) === i;
 
 function* search(bench: Workbench, form: FormId): Work<Proposals> {
-  const { site } = bench;
   const counts = new Map<string, number>();
   const count = (reason: string, more: number): void => {
     if (more > 0) counts.set(reason, (counts.get(reason) ?? 0) + more);
@@ -88,13 +85,18 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
       for (const index of rows.spansM.keys()) yield* rows.make(index);
     }
     const found: Arrangement[] = [];
-    for (const pattern of patternsFor(bench, asked)) {
-      const result = arrange(requestFor(asked, site, pattern), site, bench.tables.tableFor(asked));
-      for (const dropped of result.dropped) count(dropped.reason, dropped.count);
-      if (found.length === 0) because.push(...result.relaxations.map(relaxationWords));
-      found.push(...result.arrangements);
-      yield;
-    }
+    const on = function* (at: Workbench): Work<readonly Arrangement[]> {
+      const here: Arrangement[] = [];
+      for (const pattern of patternsFor(at, asked)) {
+        const result = arrange(requestFor(asked, at.site, pattern), at.site, at.tables.tableFor(asked));
+        for (const dropped of result.dropped) count(dropped.reason, dropped.count);
+        if (found.length + here.length === 0) because.push(...result.relaxations.map(relaxationWords));
+        here.push(...result.arrangements);
+        yield;
+      }
+      return here;
+    };
+    found.push(...(bench.site.windows ? yield* overWindows(bench, asked, PER_FORM, on) : yield* on(bench)));
     return found.sort((a, b) => a.tableCost - b.tableCost).filter(isFirstOfItsSupports);
   };
 

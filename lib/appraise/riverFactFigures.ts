@@ -27,8 +27,8 @@ const ofGoverning = (
 /** What the rules are told of the rivers. */
 export const riverFactFigures: readonly Descriptor[] = [
   fact('riversCrossed', factOf('riversCrossed').meaning, (at) => ({
-    starts: at.appraisal.site.waters.map((_, i) => `site/waters/${i}/fromM`),
-    crossing: ['site/startM', 'site/endM'],
+    starts: at.site.waters.map((_, i) => `site/waters/${i}/fromM`),
+    crossing: [at.ends.start, at.ends.end],
   })),
   ...ofGoverning('floodFlowM3s', 'afflux', 'flowM3s'),
   ...ofGoverning('affluxM', 'afflux'),

@@ -12,7 +12,7 @@ interface Touch {
 const ends = ['start', 'end'] as const;
 type End = (typeof ends)[number];
 
-const depthOf = (at: At): DepthAlong => depthAlong(at.appraisal.site, at.option.units, at.option.designs);
+const depthOf = (at: At): DepthAlong => depthAlong(at.site, at.option.units, at.option.designs);
 
 /** Chainages at which a soffit limit may be decided: its ends within the crossing and the bends of the depth under it. */
 function placesUnder(site: Site, limit: Site['soffitLimits'][number], depth: DepthAlong): number[] {
@@ -25,7 +25,7 @@ const TOUCHES = 1e-6;
 
 /** The clearance that holds the road up: the first at which the soffit touches inside the crossing; null where none does. */
 function touchOn(at: At): Touch | null {
-  const { site } = at.appraisal;
+  const { site } = at;
   const { profile } = at.option;
   const depth = depthOf(at);
   for (const [i, limit] of site.soffitLimits.entries()) {
@@ -38,14 +38,14 @@ function touchOn(at: At): Touch | null {
 }
 
 const fixed = (at: At, end: End): boolean => {
-  const { fixedEnd } = at.appraisal.site.road;
+  const { fixedEnd } = at.site.road;
   return fixedEnd === end || fixedEnd === 'both';
 };
 
 const riseOf = (at: At, end: End): number => at.option.profile[`${end}RiseM`];
 const other = (end: End): End => (end === 'start' ? 'end' : 'start');
 
-/** Whether the road between the abutments is one line: straight, or one arc from end to end. */
+/** Whether the road between the ends of the crossing is one line: straight, or one arc from end to end. */
 function oneLine(at: At): boolean {
   const { startM, endM } = at.appraisal.site;
   return at.option.profile.pieces.some(({ fromM, toM }) => fromM === startM && toM === endM);
@@ -242,7 +242,7 @@ const approaches = (Object.keys(approachFields) as (keyof typeof approachFields)
     },
     inputs: (at) => {
       const end = at.name('end') as End;
-      const { groundZ } = at.appraisal.site;
+      const { groundZ } = at.site;
       return {
         level: fixed(at, end) ? `site/road/${end}LevelM` : `${at.root}/profile/${end}LevelM`,
         ground: `${at.root}/supports/${end === 'start' ? 0 : at.option.supports.length - 1}/groundLevelM`,
@@ -254,6 +254,7 @@ const approaches = (Object.keys(approachFields) as (keyof typeof approachFields)
         sides: 'brief/road/approachSides',
         tieIn: `brief/road/${end}TieIn`,
         reach: `brief/road/${end}ApproachM`,
+        abutment: at.option.startM === undefined ? [] : [at.ends[end], `site/${end}M`],
       } as const;
     },
   }),
@@ -309,7 +310,9 @@ export const roadFigures: readonly Descriptor[] = [
     formula: 'start and end: fill of the approach - fill with the road as proposed',
     inputs: (at) => ({
       fill: ends.map((end) => `${at.root}/profile/approaches/${end}/fillM3`),
-      proposed: ends.map((end) => `site/proposedFill/${end}`),
+      proposed: ends.map((end) =>
+        at.option.startM === undefined ? `site/proposedFill/${end}` : `${at.root}/proposedFill/${end}`,
+      ),
     }),
     compute: ({ fill, proposed }) => fill[0]! - proposed[0]! + (fill[1]! - proposed[1]!),
   }),

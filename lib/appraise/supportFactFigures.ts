@@ -31,7 +31,7 @@ const curved = (
   return [
     {
       ...fact(id, formula, inputs, ({ span, radius }) => compute(span, radius)),
-      when: (at) => at.appraisal.site.planRadiusM !== null,
+      when: (at) => at.site.planRadiusM !== null,
     },
     fact(id, `${formula}; waits for the radius`, inputs),
   ];
@@ -66,9 +66,7 @@ export const supportFactFigures: readonly Descriptor[] = [
   })),
   asIs('groundAccelerationG', (at) => ({
     given:
-      at.appraisal.site.seismic == null
-        ? 'brief/crossing/groundAccelerationG'
-        : 'site/seismic/groundAccelerationG',
+      at.site.seismic == null ? 'brief/crossing/groundAccelerationG' : 'site/seismic/groundAccelerationG',
   })),
   fact('siteClassKnown', factOf('siteClassKnown').meaning, () => ({ given: 'brief/crossing/siteClass' })),
   ...(['pierHeightNext', 'pierHeightAll'] as const).map((id) =>

@@ -13,7 +13,7 @@ import type { RowMakers } from './trialRows.ts';
  */
 export const PIER_LOADS_KN = [1500, 4000, 8000, 14000, 24000, 45000, 90000] as const;
 /** Of that load, what is permanent: ordinary road decks. */
-const PIER_PERMANENT = 0.7;
+export const PIER_PERMANENT = 0.7;
 /** Span over which the trial load is spread, m: gives wind and friction their size. */
 const PIER_SPAN_M = 40;
 

@@ -1,6 +1,6 @@
 import { meanRates, ratesFor, type Rates } from '../price/index.ts';
-import { survey } from '../site/index.ts';
-import type { MeasuredLine, Site, Study } from '../model/index.ts';
+import { siteOf, survey } from '../site/index.ts';
+import type { MeasuredLine, Site, Study, Unit } from '../model/index.ts';
 import { tableShelf, type TableShelf } from './costTable.ts';
 import { memory, siteMemory, type Memory, type SiteMemory } from './memory.ts';
 import { sizer, type Sizer } from './sizer.ts';
@@ -47,3 +47,9 @@ export function workbench(study: Study, kept: Memory = memory()): Workbench {
     booksKey,
   };
 }
+
+/** The same for a row of units: on the site between their own abutments. */
+export const benchFor = (bench: Workbench, units: readonly Unit[]): Workbench => ({
+  ...bench,
+  site: siteOf(bench.site, units),
+});

@@ -16,8 +16,8 @@ function searched(at: At): {
   const { form } = at.option.units[at.index('unit')]!;
   const both = (what: string): string[] => [`windows/${form}/${what}/least`, `windows/${form}/${what}/most`];
   return {
-    ends: ['site/startM', 'site/endM'],
-    opening: at.appraisal.site.mainOpening === null ? [] : ['site/mainOpening/fromM', 'site/mainOpening/toM'],
+    ends: [at.ends.start, at.ends.end],
+    opening: at.site.mainOpening === null ? [] : ['site/mainOpening/fromM', 'site/mainOpening/toM'],
     windows: [...both('span'), ...(endRatioWindow(form) === null ? [] : both('endRatio'))],
   };
 }
@@ -43,8 +43,8 @@ export const arrangementFigures: readonly Descriptor[] = [
     label,
     unit: 'm',
     method: 'as given',
-    formula: 'start of the crossing',
-    inputs: () => ({ start: 'site/startM' }),
+    formula: (at) => (at.option.startM === undefined ? 'start of the crossing' : 'start of the bridge'),
+    inputs: (at) => ({ start: at.ends.start }),
     compute: ({ start }) => start,
   }),
   described({
@@ -53,8 +53,8 @@ export const arrangementFigures: readonly Descriptor[] = [
     label,
     unit: 'm',
     method: 'as given',
-    formula: 'end of the crossing',
-    inputs: () => ({ end: 'site/endM' }),
+    formula: (at) => (at.option.endM === undefined ? 'end of the crossing' : 'end of the bridge'),
+    inputs: (at) => ({ end: at.ends.end }),
     compute: ({ end }) => end,
   }),
   described({

@@ -1,5 +1,6 @@
-import type { Appraisal, AppraisedOption, At, Design, Study, Support } from '../model/index.ts';
+import type { Appraisal, AppraisedOption, At, Design, Site, Study, Support } from '../model/index.ts';
 import type { Rates } from '../price/index.ts';
+import { siteOf } from '../site/index.ts';
 
 /** What is asked about: a study and the appraisal that was made of it. */
 export interface Context {
@@ -44,6 +45,14 @@ export function placeAt(context: Context, path: string, names: ReadonlyMap<strin
     path,
     name,
     index,
+    get site(): Site {
+      return names.has('option') ? siteOf(appraisal.site, this.option.units) : appraisal.site;
+    },
+    get ends(): At['ends'] {
+      const own = names.has('option') && this.option.startM !== undefined;
+      const root = own ? this.root : 'site';
+      return { start: `${root}/startM`, end: `${root}/endM`, length: `${root}/lengthM` };
+    },
     get option(): AppraisedOption {
       return optionOf(appraisal, name('option'));
     },

@@ -1,4 +1,5 @@
 import { factFigures } from '../appraise/factFigures.ts';
+import { endFigures } from '../appraise/endFigures.ts';
 import { headroomFigures } from '../appraise/headroomFigures.ts';
 import { placeFigures } from '../appraise/placeFigures.ts';
 import { hundredMmFigures } from '../appraise/hundredMmFigures.ts';
@@ -65,6 +66,7 @@ export const manual: readonly Descriptor[] = [
   ...designFigures,
   ...roadFigures,
   ...hundredMmFigures,
+  ...endFigures,
   ...headroomFigures,
   ...placeFigures,
   ...riverFigures,

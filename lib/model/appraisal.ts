@@ -144,6 +144,9 @@ export interface WorkedOption {
 }
 
 export interface AppraisedOption extends WorkedOption {
+  /** Chainages of its abutments, m, where the brief leaves them a window; absent where they are fixed. */
+  readonly startM?: number;
+  readonly endM?: number;
   readonly status: Status;
   readonly rulings: readonly Ruling[];
   /** What is wrong with where its supports stand, each by name: only an arrangement set by hand has any. */

@@ -1,5 +1,6 @@
 import type { Appraisal, AppraisedOption, Spread, Support } from './appraisal.ts';
 import type { Design } from './design.ts';
+import type { Site } from './site.ts';
 import type { Study } from './study.ts';
 
 /** Worked out here, typed into the study, taken from the shelf and to be confirmed, or not known. */
@@ -55,6 +56,10 @@ export interface At {
   name(key: string): string;
   /** The same as a place in a list. */
   index(key: string): number;
+  /** The site as the option of `:option` meets it, between its own abutments; that of the study where no option is named. */
+  readonly site: Site;
+  /** Paths of the chainages of its abutments and of the length between them. */
+  readonly ends: { readonly start: string; readonly end: string; readonly length: string };
   /** Option of `:option`, and its path, e.g. `options/3`. */
   readonly option: AppraisedOption;
   readonly root: string;

@@ -6,6 +6,13 @@ export interface Site {
   readonly startM: number;
   readonly endM: number;
   readonly lengthM: number;
+  /** Innermost places of the abutments, m, where the brief leaves them a window; absent where both are fixed. */
+  readonly windows?: { readonly startLatestM: number; readonly endEarliestM: number };
+  /**
+   * Where the abutments of an option stand inside the crossing: chainages of the ends of the crossing, m, at which the
+   * road has its proposed levels and its approaches begin to fall. Absent where the abutments stand there themselves.
+   */
+  readonly roadEnds?: { readonly startM: number; readonly endM: number };
   readonly groundX: readonly number[];
   readonly groundZ: readonly number[];
   readonly zones: readonly Zone[];
@@ -113,7 +120,7 @@ export interface Approach {
 
 /** Finished road level along the crossing and its approaches for one construction depth. */
 export interface RoadProfile {
-  /** Level at both abutments, m. */
+  /** Level at both ends of the crossing, m: at the abutments, where they have no windows. */
   readonly startLevelM: number;
   readonly endLevelM: number;
   /** Rise above the proposed levels at each end, m. */
@@ -121,7 +128,7 @@ export interface RoadProfile {
   readonly endRiseM: number;
   /** Fill of both approaches over that of the road as proposed, m3; a little less where a crest on the bridge spares one. */
   readonly addedFillM3: number;
-  /** From abutment to abutment. */
+  /** From end to end of the crossing. */
   readonly gradient: number;
   /** Steepest gradient between the abutments, either way. */
   readonly steepestGradient: number;

@@ -39,9 +39,15 @@ export interface Brief {
 }
 
 export interface Crossing {
-  /** Chainages of the two abutment bearing lines, m; start < end. */
+  /** Chainages of the two abutment bearing lines, or of the outermost places where they may stand, m; start < end. */
   readonly startM: number;
   readonly endM: number;
+  /**
+   * Windows of the abutments: farthest along the start abutment may stand, and nearest the end abutment may, m. Unknown or
+   * absent: it stands at `startM`, or at `endM`.
+   */
+  readonly startLatestM?: number | Unknown;
+  readonly endEarliestM?: number | Unknown;
   /** Ground and bed levels along the centre line; chainages rise; covers start to end. */
   readonly ground: readonly ProfilePoint[];
   readonly planRadiusM: number | 'straight' | Unknown;

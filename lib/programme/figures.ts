@@ -18,7 +18,7 @@ const data = (at: At, name: string): string => `data/programme/${name}/${speed(a
 const weeks = 'data/programme/weeksPerMonth';
 
 const activitiesOf = (at: At): readonly Activity[] =>
-  planProgramme(at.appraisal.site, at.option.designs, at.option.supports).activities;
+  planProgramme(at.site, at.option.designs, at.option.supports).activities;
 const monthsOf =
   (id: Activity['id'], what: 'months' | 'startMonths') =>
   (at: At): number =>
@@ -98,7 +98,7 @@ export const programmeFigures: readonly Descriptor[] = [
     value: monthsOf('finishes', 'months'),
     inputs: (at) => ({
       fixed: data(at, 'finishesFixed'),
-      length: 'site/lengthM',
+      length: at.ends.length,
       width: 'site/deck/widthM',
       output: data(at, 'finishesM2'),
       weeks,

@@ -9,24 +9,24 @@ const given = (at: At, field: string): string => water(at, `river/${field}`);
 const named =
   (what: string) =>
   (at: At): string =>
-    `${what}, ${at.appraisal.site.waters[riverOf(at).water]!.name}`;
-const known = (at: At): boolean => riverFlows(at.appraisal.site)[riverOf(at).water] != null;
+    `${what}, ${at.site.waters[riverOf(at).water]!.name}`;
+const known = (at: At): boolean => riverFlows(at.site)[riverOf(at).water] != null;
 
 /** What a section of the flood is integrated from. */
 const section = (at: At, ends: 'river' | 'bridge') => ({
-  ground: at.appraisal.site.groundZ.map((_, i) => `site/groundZ/${i}`),
+  ground: at.site.groundZ.map((_, i) => `site/groundZ/${i}`),
   level: water(at, 'floodLevelM'),
   ends: [
     given(at, 'floodFromM'),
     given(at, 'floodToM'),
-    ...(ends === 'bridge' ? ['site/startM', 'site/endM'] : []),
+    ...(ends === 'bridge' ? [at.ends.start, at.ends.end] : []),
   ],
   skew: 'site/skewDeg',
 });
 
 /** Places of the piers that stand in the flood of the river. */
 const piersIn = (at: At): string[] => {
-  const { floodFromM, floodToM } = at.appraisal.site.waters[riverOf(at).water]!.river!;
+  const { floodFromM, floodToM } = at.site.waters[riverOf(at).water]!.river!;
   return at.option.supports.flatMap(({ kind, chainageM }, s) =>
     kind !== 'abutment' && chainageM >= floodFromM && chainageM <= floodToM
       ? [`${at.root}/supports/${s}`]
@@ -65,7 +65,7 @@ export const riverFigures: readonly Descriptor[] = [
     method: 'greater of two ways',
     formula: 'flow as given; velocity as given x area',
     inputs: (at) => {
-      const has = at.appraisal.site.waters[riverOf(at).water]!.river!;
+      const has = at.site.waters[riverOf(at).water]!.river!;
       return {
         flow: has.flowM3s === null ? [] : [given(at, 'flowM3s')],
         velocity: has.velocityMs === null ? [] : [given(at, 'velocityMs')],

@@ -2,10 +2,11 @@ import type { Approach, RoadPiece, Site } from '../model/index.ts';
 import { approachFill } from './approachFill.ts';
 import { fixedApproach, movingApproach, type ApproachLine, type ApproachRules } from './approachLine.ts';
 import { groundAt } from './lookups.ts';
+import { roadEndsOf } from './standBetween.ts';
 
 export type RoadEnd = 'start' | 'end';
 
-/** One end of a site, looking outward from its abutment. */
+/** One end of the road of a site, looking outward from the end of the crossing: from its abutment, unless that stands farther in. */
 export interface ApproachEnd {
   readonly end: RoadEnd;
   readonly rules: ApproachRules;
@@ -19,15 +20,13 @@ export interface ApproachEnd {
   readonly proposed: Approach;
 }
 
-export const abutmentM = (site: Site, end: RoadEnd): number => (end === 'start' ? site.startM : site.endM);
-
 /** Whether an end of the road is tied to something that cannot move. */
 export const isFixed = ({ road }: Pick<Site, 'road'>, end: RoadEnd): boolean =>
   road.fixedEnd === end || road.fixedEnd === 'both';
 
 function layOut(site: Site, end: RoadEnd): ApproachEnd {
   const { road, roadCurves, groundX, groundZ } = site;
-  const at = abutmentM(site, end);
+  const at = roadEndsOf(site)[`${end}M`];
   const side = end === 'start' ? -1 : 1;
   const beyond = groundX.map((x) => side * (x - at)).filter((out) => out > 0);
   const breaksM = side < 0 ? beyond.reverse() : beyond;
@@ -54,8 +53,10 @@ function layOut(site: Site, end: RoadEnd): ApproachEnd {
 }
 
 /** Gradient of the road as proposed, straight between its levels. */
-export const proposedGradient = ({ road, lengthM }: Site): number =>
-  (road.endLevelM - road.startLevelM) / lengthM;
+export function proposedGradient(site: Site): number {
+  const { startM, endM } = roadEndsOf(site);
+  return (site.road.endLevelM - site.road.startLevelM) / (endM - startM);
+}
 
 /** Fall outward at an abutment for a gradient along the chainage there. */
 export const outwardFall = (end: RoadEnd, gradient: number): number =>
@@ -84,10 +85,13 @@ export function approachFrom(
 /** Fill and walls of an approach. */
 export function measured(
   { deck, road }: Site,
-  { rules, breaksM }: Pick<ApproachEnd, 'rules' | 'breaksM'>,
-  line: ApproachLine,
+  {
+    rules,
+    breaksM,
+  }: { readonly rules: Pick<ApproachRules, 'groundAt'>; readonly breaksM: readonly number[] },
+  { stretches }: Pick<ApproachLine, 'stretches'>,
 ): Approach {
-  return approachFill(line.stretches, rules.groundAt, breaksM, {
+  return approachFill(stretches, rules.groundAt, breaksM, {
     widthM: deck.widthM,
     sideSlope: road.fillSideSlope,
     sides: road.approachSides,
@@ -96,7 +100,7 @@ export function measured(
 
 /** An approach as pieces of the road, in order of chainage. */
 export function approachPieces(site: Site, end: RoadEnd, { stretches }: ApproachLine): RoadPiece[] {
-  const at = abutmentM(site, end);
+  const at = roadEndsOf(site)[`${end}M`];
   let innerM = 0;
   const pieces = stretches.map(({ lengthM, levelM, fall, bend1PerM }): RoadPiece => {
     const from = innerM;

@@ -84,7 +84,7 @@ export const deckFigures: readonly Descriptor[] = [
       'surfacing x its weight x width between kerbs + footways and verges x their build-up + barrier lines x their weight',
     inputs: (at) => ({
       surfacing: 'site/deck/surfacingM',
-      weight: `practice/site/surfacing-${at.appraisal.site.standard}`,
+      weight: `practice/site/surfacing-${at.site.standard}`,
       road: 'site/deck/carriagewayM',
       raised: strips(at, raised),
       build: 'practice/site/footway',

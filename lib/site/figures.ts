@@ -1,5 +1,6 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
-import { approachEnds, type RoadEnd } from './approachEnd.ts';
+import type { RoadEnd } from './approachEnd.ts';
+import { proposedApproaches } from './innerApproach.ts';
 import { curveRow } from './roadCurves.ts';
 
 /** A figure of the site that is one of the brief, read on. */
@@ -118,6 +119,19 @@ export const siteFigures: readonly Descriptor[] = [
     inputs: () => ({ end: 'brief/crossing/endM', start: 'brief/crossing/startM' }),
     compute: ({ end, start }) => end - start,
   }),
+  ...(['startLatestM', 'endEarliestM'] as const).map((which) =>
+    described({
+      path: `site/windows/${which}`,
+      label: `innermost place of the ${which === 'startLatestM' ? 'start' : 'end'} abutment`,
+      unit: 'm',
+      method: 'as given',
+      formula: 'read from the brief; where it is not given, the end of the crossing',
+      inputs: (at) => ({
+        given: at.study.brief.crossing[which] === undefined ? [] : [`brief/crossing/${which}`],
+        end: which === 'startLatestM' ? 'brief/crossing/startM' : 'brief/crossing/endM',
+      }),
+    }),
+  ),
   copied(
     'site/seismic/groundAccelerationG',
     () => 'brief/crossing/groundAccelerationG',
@@ -234,26 +248,29 @@ export const siteFigures: readonly Descriptor[] = [
   ),
   ...curve('crest'),
   ...curve('sag'),
-  described({
-    path: 'site/proposedFill/:end',
-    label: (at) => `fill of the ${at.name('end')} approach with the road as proposed`,
-    unit: 'm3',
-    method: 'integration over the ground',
-    formula: 'W h + s h^2 across with side slopes, W h between walls, summed along the approach',
-    value: (at) => approachEnds(at.appraisal.site)[at.name('end') as RoadEnd].proposed.fillM3,
-    inputs: (at) => {
-      const end = at.name('end');
-      return {
-        levels: ['site/road/startLevelM', 'site/road/endLevelM'],
-        ground: `site/groundZ/${end === 'start' ? 0 : at.appraisal.site.groundZ.length - 1}`,
-        width: 'site/deck/widthM',
-        slope: 'site/road/fillSideSlope',
-        gradient: 'site/road/maxGradient',
-        curves: ['site/roadCurves/crestRadiusM', 'site/roadCurves/sagRadiusM'],
-        sides: 'brief/road/approachSides',
-      } as const;
-    },
-  }),
+  ...(['site', 'options/:option'] as const).map((root) =>
+    described({
+      path: `${root}/proposedFill/:end`,
+      label: (at) => `fill of the ${at.name('end')} approach with the road as proposed`,
+      unit: 'm3',
+      method: 'integration over the ground',
+      formula: 'W h + s h^2 across with side slopes, W h between walls, summed along the approach',
+      value: (at) => proposedApproaches(at.site)[at.name('end') as RoadEnd].fillM3,
+      inputs: (at) => {
+        const end = at.name('end');
+        return {
+          levels: ['site/road/startLevelM', 'site/road/endLevelM'],
+          ground: `site/groundZ/${end === 'start' ? 0 : at.site.groundZ.length - 1}`,
+          width: 'site/deck/widthM',
+          slope: 'site/road/fillSideSlope',
+          gradient: 'site/road/maxGradient',
+          curves: ['site/roadCurves/crestRadiusM', 'site/roadCurves/sagRadiusM'],
+          sides: 'brief/road/approachSides',
+          abutment: at.ends[end as RoadEnd],
+        } as const;
+      },
+    }),
+  ),
   described({
     path: 'site/planRadiusM',
     label: 'plan radius',

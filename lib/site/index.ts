@@ -5,6 +5,7 @@ export { groundAt, soffitLimitAt, softZonesAt, stretchAt, waterDepthAt } from '.
 export type { DepthAlong } from './depthAlong.ts';
 export { headroomSpare, type HeadroomSpare } from './headroomSpare.ts';
 export { profileFor, proposedProfile, type ProfileRefusal, type ProfileResult } from './profileFor.ts';
+export { abutmentWindows, roadEndsOf, siteOf, standBetween, type AbutmentWindows } from './standBetween.ts';
 export { survey } from './survey.ts';
 export { roadCurves } from './roadCurves.ts';
 export { roadLevelAt } from './roadLevelAt.ts';

@@ -1,5 +1,6 @@
 import type { Site, SoffitLimit } from '../model/index.ts';
 import { depthAt, type DepthAlong } from './depthAlong.ts';
+import { roadEndsOf } from './standBetween.ts';
 
 /** A road level that a soffit limit asks for at a place. */
 export interface Need {
@@ -34,14 +35,15 @@ export function needsOf(site: Site, depth: number | DepthAlong): Need[] {
  * line without sags over all of them. In order of chainage.
  */
 export function decidingNeeds(
-  site: Pick<Site, 'startM' | 'endM'>,
+  site: Site,
   needs: readonly Need[],
   startLevelM: number,
   endLevelM: number,
 ): Need[] {
-  const grade = (endLevelM - startLevelM) / (site.endM - site.startM);
+  const { startM, endM } = roadEndsOf(site);
+  const grade = (endLevelM - startLevelM) / (endM - startM);
   const above = needs
-    .filter(({ chainageM, levelM }) => levelM > startLevelM + grade * (chainageM - site.startM))
+    .filter(({ chainageM, levelM }) => levelM > startLevelM + grade * (chainageM - startM))
     .sort((a, b) => a.chainageM - b.chainageM || a.levelM - b.levelM);
   const hull: Need[] = [];
   /** Whether b lies on or under the line from a to c. */

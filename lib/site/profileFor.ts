@@ -1,4 +1,4 @@
-import type { RoadProfile, Site, SoffitLimit } from '../model/index.ts';
+import type { Approach, RoadProfile, Site, SoffitLimit } from '../model/index.ts';
 import { addedFill } from './addedFill.ts';
 import {
   approachEnds,
@@ -12,10 +12,12 @@ import {
 } from './approachEnd.ts';
 import { crestLevelAt, crestPieces, type Crest } from './crest.ts';
 import type { DepthAlong } from './depthAlong.ts';
+import { innerApproach, proposedApproaches, together } from './innerApproach.ts';
 import { groundAt } from './lookups.ts';
 import { hasRoad, lowestEnds, type Layout } from './lowestEnds.ts';
 import { decidingNeeds, needsOf, type Need } from './needs.ts';
 import { pieceGradientAt } from './roadLevelAt.ts';
+import { roadEndsOf } from './standBetween.ts';
 
 /** Why no road line fits, and the smallest ways out. */
 export interface ProfileRefusal {
@@ -36,7 +38,8 @@ export type ProfileResult =
 
 /** What the road between the abutments is laid out by when free ends may rise by so much, m. */
 function layoutOf(site: Site, riseM: number): Layout {
-  const { road, startM, endM, roadCurves, deck } = site;
+  const { road, roadCurves, deck } = site;
+  const { startM, endM } = roadEndsOf(site);
   const { startLevelM, endLevelM, maxGradient } = road;
   const most = (end: RoadEnd): number => road[`${end}LevelM`] + (isFixed(site, end) ? 0 : riseM);
   const ends = approachEnds(site);
@@ -109,7 +112,7 @@ function gradientRefusal(site: Site): ProfileRefusal {
     chainageM: null,
     missedBy: gradient - site.road.maxGradient,
     get riseNeededM() {
-      return smallest(gradient * site.lengthM, (rise) => fitsWith(site, [], rise, 0));
+      return smallest(gradient * roadLength(site), (rise) => fitsWith(site, [], rise, 0));
     },
   };
 }
@@ -134,13 +137,19 @@ function refusal(site: Site, needs: readonly Need[]): ProfileRefusal {
   };
 }
 
+/** From end to end of the crossing, m. */
+function roadLength(site: Site): number {
+  const { startM, endM } = roadEndsOf(site);
+  return endM - startM;
+}
+
 /** The road on a crest with the approaches that belong to it. */
 function profileOn(site: Site, crest: Crest): RoadProfile {
-  const { road, lengthM } = site;
+  const { road } = site;
   const ends = approachEnds(site);
   const level = { start: crest.levelM, end: crest.endLevelM };
   const side = (end: RoadEnd) => {
-    // A road that cannot move stays as it is behind its abutment, whatever the bridge does.
+    // A road that cannot move stays as it is beyond the crossing, whatever the bridge does.
     if (isFixed(site, end)) return { pieces: [], approach: ends[end].proposed };
     const gradient = end === 'start' ? crest.before : crest.after;
     const line = approachFrom(ends[end], level[end], outwardFall(end, gradient));
@@ -149,17 +158,18 @@ function profileOn(site: Site, crest: Crest): RoadProfile {
   const start = side('start');
   const end = side('end');
   const middle = crestPieces(crest);
-  const approaches = { start: start.approach, end: end.approach };
+  const whole = (which: RoadEnd, { approach }: typeof start): Approach =>
+    together(innerApproach(site, which, middle), approach);
+  const approaches = { start: whole('start', start), end: whole('end', end) };
+  const proposed = proposedApproaches(site);
   return {
     startLevelM: level.start,
     endLevelM: level.end,
     startRiseM: level.start - road.startLevelM,
     endRiseM: level.end - road.endLevelM,
     addedFillM3:
-      approaches.start.fillM3 -
-      ends.start.proposed.fillM3 +
-      (approaches.end.fillM3 - ends.end.proposed.fillM3),
-    gradient: (level.end - level.start) / lengthM,
+      approaches.start.fillM3 - proposed.start.fillM3 + (approaches.end.fillM3 - proposed.end.fillM3),
+    gradient: (level.end - level.start) / roadLength(site),
     steepestGradient: Math.max(
       ...middle.flatMap((piece) => [piece.gradient, pieceGradientAt(piece, piece.toM)].map(Math.abs)),
     ),
@@ -172,13 +182,14 @@ function profileOn(site: Site, crest: Crest): RoadProfile {
 /** The road as proposed: straight between its levels, whatever stands in its way. */
 export function proposedProfile(site: Site): RoadProfile {
   const gradient = proposedGradient(site);
+  const { startM, endM } = roadEndsOf(site);
   return profileOn(site, {
-    startM: site.startM,
-    endM: site.endM,
+    startM,
+    endM,
     levelM: site.road.startLevelM,
     endLevelM: site.road.endLevelM,
-    fromM: site.startM,
-    toM: site.endM,
+    fromM: startM,
+    toM: endM,
     before: gradient,
     after: gradient,
     radiusM: Infinity,

@@ -1,6 +1,7 @@
 import type { Brief, Obstacle, Site, SoffitLimit, Water, WaterBody, Zone } from '../model/index.ts';
 import { deckSpec } from './deckSpec.ts';
 import { roadCurves } from './roadCurves.ts';
+import { widestBarred } from './widestBarred.ts';
 
 function zoneOf(obstacle: Obstacle): Zone[] {
   if (obstacle.supports === 'none') return [];
@@ -66,24 +67,13 @@ function bodyOf(water: Water): WaterBody {
   };
 }
 
-/** Widest stretch inside the crossing that no support may stand in, overlapping hard zones taken together. */
-function widestBarred(zones: readonly Zone[], startM: number, endM: number): Site['mainOpening'] {
-  const hard = zones
-    .filter((zone) => zone.hard && zone.toM > startM && zone.fromM < endM)
-    .map((zone) => ({ fromM: Math.max(zone.fromM, startM), toM: Math.min(zone.toM, endM) }))
-    .sort((a, b) => a.fromM - b.fromM);
-  const joined: { fromM: number; toM: number }[] = [];
-  for (const zone of hard) {
-    const last = joined.at(-1);
-    if (last !== undefined && zone.fromM <= last.toM) last.toM = Math.max(last.toM, zone.toM);
-    else joined.push({ ...zone });
-  }
-  let widest: Site['mainOpening'] = null;
-  for (const { fromM, toM } of joined) {
-    const widthM = toM - fromM;
-    if (widest === null || widthM > widest.widthM + 1e-9) widest = { fromM, toM, widthM };
-  }
-  return widest;
+/** Innermost places of the abutments where either has a window. */
+function windowsOf({ startM, endM, startLatestM, endEarliestM }: Brief['crossing']): Pick<Site, 'windows'> {
+  const windows = {
+    startLatestM: startLatestM === undefined || startLatestM === 'unknown' ? startM : startLatestM,
+    endEarliestM: endEarliestM === undefined || endEarliestM === 'unknown' ? endM : endEarliestM,
+  };
+  return windows.startLatestM > startM || windows.endEarliestM < endM ? { windows } : {};
 }
 
 /**
@@ -98,6 +88,7 @@ export function survey(brief: Brief): Site {
     startM: crossing.startM,
     endM: crossing.endM,
     lengthM: crossing.endM - crossing.startM,
+    ...windowsOf(crossing),
     groundX: crossing.ground.map((point) => point.chainageM),
     groundZ: crossing.ground.map((point) => point.levelM),
     zones,

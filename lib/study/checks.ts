@@ -1,4 +1,4 @@
-import type { Brief, Problem, Study } from '../model/index.ts';
+import type { Brief, Crossing, Problem, Study } from '../model/index.ts';
 import { problem } from './problem.ts';
 
 type Path = readonly (string | number)[];
@@ -13,6 +13,35 @@ function rising(path: Path, from: string, to: string, fromM: number, toM: number
   return [
     problem('reversed', [...path, to], `more than '${from}' at ${fromM}`, `${toM}`, { unit: 'm', remedy }),
   ];
+}
+
+/** The windows of the abutments lie inside the crossing and leave room between them. */
+function windowProblems({
+  startM,
+  endM,
+  startLatestM = 'unknown',
+  endEarliestM = 'unknown',
+}: Crossing): Problem[] {
+  const path = ['brief', 'crossing'];
+  const remedy = "Put the innermost place of an abutment inside the crossing, or 'unknown' where it is fixed";
+  const latest = startLatestM === 'unknown' ? startM : startLatestM;
+  const earliest = endEarliestM === 'unknown' ? endM : endEarliestM;
+  const found: Problem[] = [];
+  if (!(latest >= startM && latest < endM)) {
+    const expected = `from ${startM}, the start of the crossing, to less than ${endM}, its end`;
+    found.push(problem('outside', [...path, 'startLatestM'], expected, `${latest}`, { unit: 'm', remedy }));
+  }
+  if (!(earliest <= endM && earliest > startM)) {
+    const expected = `from more than ${startM}, the start of the crossing, to ${endM}, its end`;
+    found.push(problem('outside', [...path, 'endEarliestM'], expected, `${earliest}`, { unit: 'm', remedy }));
+  }
+  if (found.length === 0 && !(latest < earliest)) {
+    const expected = `more than ${latest}, as far along as the start abutment may stand`;
+    found.push(
+      problem('reversed', [...path, 'endEarliestM'], expected, `${earliest}`, { unit: 'm', remedy }),
+    );
+  }
+  return found;
 }
 
 function crossingProblems({ crossing }: Brief): Problem[] {
@@ -31,6 +60,7 @@ function crossingProblems({ crossing }: Brief): Problem[] {
       ),
     );
   }
+  found.push(...windowProblems(crossing));
   ground.forEach((point, i) => {
     const before = ground[i - 1];
     if (before === undefined || point.chainageM > before.chainageM) return;

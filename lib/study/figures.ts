@@ -82,6 +82,8 @@ const stripOf = (at: At): string => `${at.study.brief.deck[at.index('i')]!.kind}
 export const studyFigures: readonly Descriptor[] = [
   typed('brief/crossing/startM', 'start of the crossing', 'm'),
   typed('brief/crossing/endM', 'end of the crossing', 'm'),
+  typed('brief/crossing/startLatestM', 'innermost place of the start abutment', 'm'),
+  typed('brief/crossing/endEarliestM', 'innermost place of the end abutment', 'm'),
   typed('brief/crossing/ground/:i/chainageM', (at) => `chainage of ground point ${at.index('i') + 1}`, 'm'),
   typed('brief/crossing/ground/:i/levelM', (at) => `level of ground point ${at.index('i') + 1}`, 'm'),
   typed('brief/crossing/planRadiusM', 'plan radius', 'm'),

@@ -38,6 +38,8 @@ const orUnknown = <T extends z.ZodType>(schema: T) => z.union([unknown, schema])
 const crossing = z.strictObject({
   startM: chainage,
   endM: chainage,
+  startLatestM: orUnknown(chainage).exactOptional(),
+  endEarliestM: orUnknown(chainage).exactOptional(),
   ground: z
     .array(z.strictObject({ chainageM: chainage, levelM: level }))
     .min(2)

@@ -52,7 +52,7 @@ const movementFigures = (at: At) => {
 
 /** Vessels of the waters a support stands in, and their speeds. */
 const vesselsAt = (at: At): { readonly tonnes: string[]; readonly speeds: string[] } => {
-  const { waters } = at.appraisal.site;
+  const { waters } = at.site;
   const x = at.support.chainageM;
   const navigable = waters.flatMap(({ fromM, toM, river }, i) =>
     x >= fromM && x <= toM && (river?.vesselDwtT ?? 0) > 0 ? [`site/waters/${i}/river`] : [],
@@ -85,7 +85,7 @@ export const articulationFigures: readonly Descriptor[] = [
     formula:
       'one unit of a slab, girder or box form, pressed at its ends; movement from its middle and skew within their limits',
     inputs: (at) => ({
-      ends: ['site/startM', 'site/endM'],
+      ends: [at.ends.start, at.ends.end],
       skew: 'site/skewDeg',
       mostSkew: 'data/substructure/integral/mostSkewDeg',
       most: 'data/substructure/integral/mostMovementMm',
@@ -176,7 +176,7 @@ export const articulationFigures: readonly Descriptor[] = [
   }),
   described({
     path: support('articulation/alongKN'),
-    when: (at) => holding(at).length === 1 && at.appraisal.site.standard === 'lm1',
+    when: (at) => holding(at).length === 1 && at.site.standard === 'lm1',
     label: on('force along the road'),
     unit: 'kN',
     method: 'braking and friction',

@@ -35,7 +35,7 @@ function barsOf(at: At): string {
 
 /** Level of water that can reach the pit: ordinary level of the water here, on a flood plain of the first water. */
 function watersAt(at: At): string[] {
-  const { waters, soffitLimits } = at.appraisal.site;
+  const { waters, soffitLimits } = at.site;
   const x = at.support.chainageM;
   const onPlain = soffitLimits.some((one) => one.kind === 'flood' && x >= one.fromM && x <= one.toM);
   const reaching = waters.flatMap((water, i) => (onPlain || (x >= water.fromM && x <= water.toM) ? [i] : []));

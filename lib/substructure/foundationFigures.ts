@@ -37,13 +37,13 @@ const loads = (at: At) =>
     building:
       at.support.articulation.buildingKNm === undefined ? [] : [`${at.foot}/articulation/buildingKNm`],
     struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],
-    earthquake: at.appraisal.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
+    earthquake: at.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
     shaft: [`${at.foot}/shaft/lengthM`, `${at.foot}/shaft/widthM`],
   }) as const;
 
 /** Waters whose flood reaches a support: those it stands in, and on a flood plain all. */
 const floods = (at: At): string[] => {
-  const { site } = at.appraisal;
+  const { site } = at;
   const x = at.support.chainageM;
   const onPlain = site.soffitLimits.some((one) => one.kind === 'flood' && x >= one.fromM && x <= one.toM);
   return site.waters.flatMap((water, i) =>
@@ -54,7 +54,7 @@ const floods = (at: At): string[] => {
 };
 
 /** The design flood at a support, where its flow is known. */
-const flowOver = (at: At): FlowAt | null => flowAt(at.appraisal.site, at.support.chainageM);
+const flowOver = (at: At): FlowAt | null => flowAt(at.site, at.support.chainageM);
 
 /** A figure of the river whose flood reaches a support. */
 function riverOf(at: At, field: string): string[] {
@@ -66,11 +66,11 @@ function riverOf(at: At, field: string): string[] {
 /** What the brief gives of that river, where it does. */
 function givenOf(at: At, field: 'siltFactor' | 'grainMm'): string[] {
   const water = flowOver(at)?.water;
-  const given = water === undefined ? null : at.appraisal.site.waters[water]!.river?.[field];
+  const given = water === undefined ? null : at.site.waters[water]!.river?.[field];
   return given == null ? [] : [`site/waters/${water}/river/${field}`];
 }
 
-const groundLine = (at: At): string[] => at.appraisal.site.groundZ.map((_, i) => `site/groundZ/${i}`);
+const groundLine = (at: At): string[] => at.site.groundZ.map((_, i) => `site/groundZ/${i}`);
 
 const pierScour = (name: string): string => `data/river/pierScour/${name}`;
 const hec18 = {
@@ -93,7 +93,7 @@ export const foundationFigures: readonly Descriptor[] = [
     method: 'difference',
     formula:
       'design flood level - ground level, at least the depth of ordinary water; 0 where no flood reaches',
-    value: (at) => settingAt(at.appraisal.site, at.support.chainageM).floodDepthM,
+    value: (at) => settingAt(at.site, at.support.chainageM).floodDepthM,
     inputs: (at) => ({
       floods: floods(at),
       ground: `${at.foot}/groundLevelM`,

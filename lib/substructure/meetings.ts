@@ -31,7 +31,7 @@ export function depthPathAt(at: At, { unit, s, path }: UnitAt): string | null {
 
 /** Which of its supports holds a unit along the road. */
 export function fixedIn(at: At, unit: number): number {
-  const { site } = at.appraisal;
+  const { site } = at;
   const { supportsM } = at.option.units[unit]!;
   return fixedSupport(
     supportsM,

@@ -39,7 +39,7 @@ const pierInputs = (at: At) =>
     building:
       at.support.articulation.buildingKNm === undefined ? [] : [`${at.foot}/articulation/buildingKNm`],
     struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],
-    earthquake: at.appraisal.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
+    earthquake: at.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
     stress: pier('axialShare'),
     slenderness: pier('slenderness'),
     step: pier('stepM'),

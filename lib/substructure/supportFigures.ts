@@ -15,14 +15,14 @@ export function supportName(at: At): string {
 
 /** The two surveyed points on either side of a support; null beyond the survey. */
 function groundPoints(at: At): readonly [low: number, high: number] | null {
-  const { groundX } = at.appraisal.site;
+  const { groundX } = at.site;
   const high = groundX.findIndex((x) => x > at.support.chainageM);
   return high > 0 ? [high - 1, high] : null;
 }
 
 function watersAt(at: At): number[] {
   const x = at.support.chainageM;
-  return at.appraisal.site.waters.flatMap(({ fromM, toM }, i) => (x >= fromM && x <= toM ? [i] : []));
+  return at.site.waters.flatMap(({ fromM, toM }, i) => (x >= fromM && x <= toM ? [i] : []));
 }
 
 /** The unit and place a reaction of the support is read at. */

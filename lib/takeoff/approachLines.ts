@@ -1,12 +1,17 @@
 import type { MeasuredLine, RoadProfile, Site } from '../model/index.ts';
+import { roadEndsOf } from '../site/index.ts';
 import { substructureData } from '../substructure/data.ts';
+import { furnitureOver } from './furnitureLines.ts';
 
 /**
  * Fill of the two approaches, m3, and where it stands between retaining walls their concrete and bars: as measured along
  * the road of the option over the ground. Walls are made like the wings of the abutments, by their face: a stem of mean
- * thickness and a footing as wide as a share of the height.
+ * thickness and a footing as wide as a share of the height. Where an abutment stands inside the crossing, the road from
+ * there to the end of the crossing has surfacing and edges on the fill as it would have on the deck, so that bridges of
+ * any length are paid for over the same road.
  */
-export function approachLines({ road }: Site, profile: RoadProfile): MeasuredLine[] {
+export function approachLines(site: Site, profile: RoadProfile): MeasuredLine[] {
+  const { road } = site;
   return (['start', 'end'] as const).flatMap((end) => {
     const { fillM3, wallM2, lengthM } = profile.approaches[end];
     const long = `${lengthM.toFixed(0)} m from the abutment to the ground`;
@@ -18,7 +23,8 @@ export function approachLines({ road }: Site, profile: RoadProfile): MeasuredLin
       what: `${end} approach`,
       how: `${long}, ${sides}`,
     };
-    return wallM2 > 0 ? [fill, ...wallLines(`${end} approach`, wallM2)] : [fill];
+    const lines = wallM2 > 0 ? [fill, ...wallLines(`${end} approach`, wallM2)] : [fill];
+    return [...lines, ...roadLines(site, end)];
   });
 }
 
@@ -40,4 +46,16 @@ function wallLines(where: string, faceM2: number): MeasuredLine[] {
     line('footing-concrete', footingM3, 'wall footings', 'by height'),
     line('reinforcement', footingM3 * footing.barsKgM3, 'wall footings', `${footing.barsKgM3} kg/m3`),
   ];
+}
+
+/** Surfacing and edges of the road between an abutment and the end of the crossing. */
+function roadLines(site: Site, end: 'start' | 'end'): MeasuredLine[] {
+  const { startM, endM } = roadEndsOf(site);
+  const lengthM = end === 'start' ? site.startM - startM : endM - site.endM;
+  if (!(lengthM > 0)) return [];
+  return furnitureOver(lengthM, site.deck.widthM).map((line) => ({
+    ...line,
+    part: 'approaches',
+    what: `${end} approach road, ${line.what}`,
+  }));
 }

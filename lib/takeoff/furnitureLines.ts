@@ -1,15 +1,18 @@
 import type { MeasuredLine, Site } from '../model/index.ts';
 
 /** Waterproofing and surfacing over the deck and a parapet along each edge. */
-export function furnitureLines(site: Site): MeasuredLine[] {
-  const { lengthM, deck } = site;
+export const furnitureLines = ({ lengthM, deck }: Site): MeasuredLine[] =>
+  furnitureOver(lengthM, deck.widthM);
+
+/** The same over a length and a width, m. */
+export function furnitureOver(lengthM: number, widthM: number): MeasuredLine[] {
   return [
     {
       part: 'deck',
       item: 'surfacing',
-      quantity: lengthM * deck.widthM,
+      quantity: lengthM * widthM,
       what: 'waterproofing and surfacing',
-      how: `${lengthM} x ${deck.widthM} m`,
+      how: `${lengthM} x ${widthM} m`,
     },
     {
       part: 'deck',

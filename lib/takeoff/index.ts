@@ -1,4 +1,5 @@
 export { approachLines } from './approachLines.ts';
+export { furnitureLines } from './furnitureLines.ts';
 export { girderLines } from './girderLines.ts';
 export { itemOf, items, type Item } from './items.ts';
 export { methodLines } from './methodLines.ts';

@@ -32,12 +32,12 @@ const crossing =
 const isItem =
   (item: string) =>
   (at: At): boolean =>
-    crossing(() => true)(at) && lineOf(at).item === item;
+    crossing(() => true)(at) && lineOf(at).item === item && lineOf(at).part !== 'approaches';
 
 /** What the possessions of a railway hang on: the method of the unit above it, its pieces, and the railway itself. */
 function possession(at: At) {
   const name = lineOf(at).what.replace('possessions of ', '');
-  const { zones, soffitLimits } = at.appraisal.site;
+  const { zones, soffitLimits } = at.site;
   const stretches = [
     ...zones.flatMap((zone, i) => (zone.kind === 'railway' && zone.name === name ? [`site/zones/${i}`] : [])),
     ...soffitLimits.flatMap((limit, i) =>
@@ -88,6 +88,26 @@ const approach = (end: End): Descriptor[] => {
       inputs: (at) => ({ fill: `${at.root}/profile/approaches/${end}/fillM3` }),
       compute: ({ fill }) => fill,
     }),
+    ...(['surfacing', 'parapet'] as const).map((id) =>
+      described({
+        path,
+        when: (at) =>
+          crossing((what) => what.startsWith(`${end} approach road`))(at) && lineOf(at).item === id,
+        label,
+        unit,
+        method: 'product',
+        formula:
+          id === 'surfacing'
+            ? 'length on fill between the abutment and the end of the crossing x deck width'
+            : 'two edges x length on fill between the abutment and the end of the crossing',
+        inputs: (at) => ({
+          outer: `site/${end}M`,
+          abutment: at.ends[end],
+          width: id === 'surfacing' ? ['site/deck/widthM'] : [],
+        }),
+        compute: ({ outer, abutment, width }) => Math.abs(abutment - outer) * (width[0] ?? 2),
+      }),
+    ),
     described({
       path,
       when: item('abutment-concrete', ' walls'),
@@ -169,7 +189,7 @@ export const lineFigures: readonly Descriptor[] = [
     unit,
     method: 'product',
     formula: 'length x deck width',
-    inputs: () => ({ length: 'site/lengthM', width: 'site/deck/widthM' }),
+    inputs: (at) => ({ length: at.ends.length, width: 'site/deck/widthM' }),
     compute: ({ length, width }) => length * width,
   }),
   described({
@@ -179,7 +199,7 @@ export const lineFigures: readonly Descriptor[] = [
     unit,
     method: 'product',
     formula: 'two edges x length',
-    inputs: () => ({ length: 'site/lengthM' }),
+    inputs: (at) => ({ length: at.ends.length }),
     compute: ({ length }) => 2 * length,
   }),
   ...approach('start'),

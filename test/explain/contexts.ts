@@ -202,3 +202,21 @@ export const variants = (): Context =>
       },
     };
   });
+
+/** The crossing with a window for each abutment: bridges shorter than the crossing, their approaches between walls. */
+export const inWindows = (): Context =>
+  once('inWindows', () => {
+    const study = lowFerry();
+    const { brief, books, options } = study;
+    return {
+      ...study,
+      brief: {
+        ...brief,
+        crossing: { ...brief.crossing, startLatestM: 1264, endEarliestM: 1430 },
+        road: { ...brief.road, fixedEnd: 'start', approachSides: 'walls' },
+        waters: brief.waters.map((water) => ({ ...water, flowM3s: 420, allowedAffluxM: 0.2 })),
+      },
+      books: { ...books, draws: 300 },
+      options: { ...options, forms: ['composite-i', 'truss'], workOutAnyway: ['composite-i', 'truss'] },
+    };
+  });

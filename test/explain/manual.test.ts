@@ -1,13 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import { figure, figurePaths, rebuilt, type Context } from '../../lib/explain/index.ts';
 import { bibliography } from '../../lib/rules/index.ts';
-import { example, frame, inFlood, otherwise, variants } from './contexts.ts';
+import { example, frame, inFlood, inWindows, otherwise, variants } from './contexts.ts';
 
 /** Name, study, and how many figures it has at the least. */
 const contexts: readonly (readonly [name: string, context: () => Context, least: number])[] = [
   ['the worked example', example, 1000],
   ['the crossing seen otherwise', otherwise, 1000],
   ['the crossing in a known flood', inFlood, 1000],
+  ['abutments that stand in their windows', inWindows, 1000],
   ['a portal frame', frame, 300],
   ['options made in every way', variants, 500],
 ];
