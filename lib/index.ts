@@ -43,6 +43,7 @@ export {
   constructionDepth,
   groundAt,
   roadLevelAt,
+  siteOf,
   soffitLimitAt,
   stretchAt,
   survey,

@@ -8,4 +8,5 @@ export {
   familyOf,
   formIds,
   roadLevelAt,
+  siteOf,
 } from '../lib/index.ts';

@@ -8,6 +8,8 @@ function optionJson(option: AppraisedOption): object {
     form: option.form,
     family: option.family,
     method: option.method,
+    startM: option.startM,
+    endM: option.endM,
     units: option.units.map((unit) => ({ form: unit.form, spans: spansOf(unit) })),
     spans: option.units.flatMap(spansOf),
     supports: option.supports.map(({ chainageM, kind, heightM }) => ({ chainageM, kind, heightM })),

@@ -1,6 +1,7 @@
 import { fixed, length } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
+import { siteOf } from '../model.ts';
 import { roadLevel, soffitLevel, spanPaths, supportChainages } from './alongOption.ts';
 import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Asked } from './asked.ts';
@@ -177,7 +178,9 @@ export function crossing(input: CrossingInput): Piece {
     .slice(1)
     .map((at, index) => (small ? length(at - (inside[index] ?? at)) : fixed(at - (inside[index] ?? at), 1)));
   const changes = option === null ? [] : spanChanges(option, input.handles?.hold ?? null);
-  const total = fixed(site.lengthM, 1);
+  const ends = option === null ? site : siteOf(site, option.units);
+  const isShorter = option?.startM !== undefined;
+  const total = fixed(ends.lengthM, 1);
   const datum = datumBelow(frame, bottomY + 5);
   const band = withBand
     ? dataBand(site, option, frame, datum.y, { accent: ink.accent, datumM: datum.levelM })
@@ -235,10 +238,10 @@ export function crossing(input: CrossingInput): Piece {
       several &&
         !small &&
         inside.length === chainages.length &&
-        dimensionChain([frame.x(site.startM), frame.x(site.endM)], dimensionTop, [total], {
+        dimensionChain([frame.x(ends.startM), frame.x(ends.endM)], dimensionTop, [total], {
           weight: 600,
           size: letters.table,
-          asked: ['site/lengthM'],
+          asked: [isShorter ? `options/${String(option.number)}/lengthM` : 'site/lengthM'],
         }),
       inside.length > 1 &&
         dimensionChain(

@@ -1,5 +1,6 @@
 import { chainage, fixed, length, level } from '../format.ts';
 import type { AppraisedOption, Site, Support } from '../model.ts';
+import { siteOf } from '../model.ts';
 import { roadLevel, spansOf, supportChainages, supportName } from './alongOption.ts';
 import { optionTitle } from './optionWords.ts';
 import { roadNeeds } from './roadNeeds.ts';
@@ -26,6 +27,7 @@ function foundingWords(support: Support): string {
 }
 
 function write(site: Site, option: AppraisedOption): string {
+  const own = siteOf(site, option.units);
   const at = supportChainages(option);
   const name = (index: number): string => supportName(index, at.length);
   const spans = spansOf(option).map((span, i) => `${name(i)} to ${name(i + 1)} ${length(span)} m`);
@@ -39,7 +41,7 @@ function write(site: Site, option: AppraisedOption): string {
       ? `${level(midspan)} m throughout the main unit`
       : `${level(midspan)} m at midspan and ${level(support)} m at the supports of the main unit`;
   const { crestRadiusM } = option.profile;
-  const road = `${level(roadLevel(option, site.startM))} at A and ${level(roadLevel(option, site.endM))} at B, ${
+  const road = `${level(roadLevel(option, own.startM))} at A and ${level(roadLevel(option, own.endM))} at B, ${
     crestRadiusM === null
       ? 'straight between them'
       : `over a crest of ${fixed(Math.round(crestRadiusM / 10) * 10, 0)} m radius`
@@ -50,7 +52,7 @@ function write(site: Site, option: AppraisedOption): string {
     return `${reason}, lowest soffit allowed ${level(levelM)}, ${left} at chainage ${chainage(atM)}`;
   });
   return [
-    `${optionTitle(option)}, ${length(site.lengthM)} m from chainage ${chainage(site.startM)} to ${chainage(site.endM)}.`,
+    `${optionTitle(option)}, ${length(own.lengthM)} m from chainage ${chainage(own.startM)} to ${chainage(own.endM)}.`,
     `Spans: ${spans.join(', ')}.`,
     `Supports: ${supports.join('; ')}.`,
     `Depth of the structure: ${depth}.`,

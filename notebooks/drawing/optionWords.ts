@@ -1,4 +1,4 @@
-import { length, level } from '../format.ts';
+import { chainage, length, level } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
 import type { AppraisedOption, FormId, Site } from '../model.ts';
 import { spansOf, roadTop, structureTop } from './alongOption.ts';
@@ -36,7 +36,11 @@ export function optionNote(site: Site, option: AppraisedOption): string {
   const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
   const moved =
     rise > 0.005 ? `; road ${level(rise)} m higher` : rise < -0.005 ? `; road ${level(-rise)} m lower` : '';
-  return `${depth}${beams}${across}${struts}${tall}${moved}`;
+  const from =
+    option.startM === undefined || option.endM === undefined
+      ? ''
+      : `${length(option.endM - option.startM)} m long from ${chainage(option.startM)} to ${chainage(option.endM)}, `;
+  return `${from}${depth}${beams}${across}${struts}${tall}${moved}`;
 }
 
 /** Index of the longest span, which is printed bold. */

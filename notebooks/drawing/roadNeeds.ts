@@ -1,5 +1,5 @@
 import type { AppraisedOption, Site } from '../model.ts';
-import { constructionDepth } from '../model.ts';
+import { constructionDepth, siteOf } from '../model.ts';
 import { depthAt, lowestSoffit, placedUnits, roadLevel } from './alongOption.ts';
 
 /** What one soffit limit asks of the road over an option. */
@@ -20,9 +20,10 @@ export function roadNeeds(site: Site, option: AppraisedOption): RoadNeed[] {
   const bends = placedUnits(option).flatMap(({ design, fromM }) =>
     design.depthAlong.xM.map((x) => fromM + x),
   );
+  const { startM, endM } = siteOf(site, option.units);
   return site.soffitLimits.flatMap((limit, index) => {
-    const fromM = Math.max(limit.fromM, site.startM);
-    const toM = Math.min(limit.toM, site.endM);
+    const fromM = Math.max(limit.fromM, startM);
+    const toM = Math.min(limit.toM, endM);
     if (!(fromM < toM)) return [];
     const places = [fromM, ...bends.filter((x) => x > fromM && x < toM), toM].sort((a, b) => a - b);
     const spares = places.map((at) => lowestSoffit(site, option, at) - limit.levelM);

@@ -1,5 +1,6 @@
 import type { FormInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Shape, Site } from '../model.ts';
+import { siteOf } from '../model.ts';
 import type { PlacedUnit } from './alongOption.ts';
 import { placedUnits, readAt, roadBends, roadLevel, slabLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
@@ -170,8 +171,7 @@ export function superstructure(
 ): Piece {
   const units = placedUnits(option);
   const plain = style.plain === true;
-  const from = site.startM;
-  const to = site.endM;
+  const { startM: from, endM: to } = siteOf(site, option.units);
   const road = (x: number, rise = 0): XY => [frame.x(x), frame.y(roadLevel(option, x) + rise)];
   const along = (fromM: number, toM: number, rise = 0): XY[] =>
     [fromM, ...roadBends(option, fromM, toM, frame.pxPerM), toM].map((x) => road(x, rise));

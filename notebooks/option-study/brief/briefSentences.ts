@@ -2,7 +2,7 @@ import { ratesFor, type Obstacle, type Study } from '../../../lib/index.ts';
 import { h } from '../../html.ts';
 import { standing, type StudyStore } from '../../page/index.ts';
 import type { Graph } from '../../reactive/index.ts';
-import { envelopeSentence, lineSentence, supportsSentence } from './crossingSentences.ts';
+import { envelopeSentence, lineSentence, supportsSentence, windowsSentence } from './crossingSentences.ts';
 import { inWords } from './inWords.ts';
 import { budgetAmount, planShapeOf, provedOf } from './madeFields.ts';
 import { accessSentence, budgetSentence, demandsSentence, groundSentence } from './meansSentences.ts';
@@ -61,6 +61,7 @@ export function briefSentences(graph: Graph, store: StudyStore): HTMLElement {
       const paragraphs = [
         [
           lineSentence(words, study),
+          windowsSentence(words, study),
           obstacles.map((obstacle, index) => [
             supportsSentence(words, obstacle, index, index === main),
             envelopeSentence(words, store, obstacle, index),

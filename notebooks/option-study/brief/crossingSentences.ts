@@ -1,6 +1,6 @@
 import type { Obstacle, Study } from '../../../lib/index.ts';
 import type { HtmlChild } from '../../html.ts';
-import { putAt, type Path, type StudyStore } from '../../page/index.ts';
+import { putAt, type Made, type Path, type StudyStore } from '../../page/index.ts';
 import { place, type InWords } from './inWords.ts';
 import {
   envelopeWidth,
@@ -61,6 +61,38 @@ export function lineSentence({ fields, chainage }: InWords, { brief }: Study): H
       max: { value: 75 },
     }),
     '° off square. ',
+  ];
+}
+
+/** The innermost place of an abutment: a chainage of the brief, or not known where the abutment is fixed. */
+const innermost = (which: 'startLatestM' | 'endEarliestM'): Made<number | 'unknown'> => ({
+  key: `brief.crossing.${which}`,
+  get: ({ brief }) => brief.crossing[which] ?? 'unknown',
+  put: (study, value) => putAt(study, ['brief', 'crossing'], { ...study.brief.crossing, [which]: value }),
+  owns: [['brief', 'crossing', which]],
+});
+
+/** How far in from the ends of the crossing its abutments may stand. */
+export function windowsSentence({ fields }: InWords, { brief }: Study): HtmlChild {
+  const { startM, endM } = brief.crossing;
+  return [
+    'The start abutment may stand as far along as ',
+    fields.figure(innermost('startLatestM'), {
+      label: 'innermost place of the start abutment',
+      places: 0,
+      unit: 'm',
+      unknown: 'the start',
+      from: startM,
+    }),
+    ' and the end abutment as far back as ',
+    fields.figure(innermost('endEarliestM'), {
+      label: 'innermost place of the end abutment',
+      places: 0,
+      unit: 'm',
+      unknown: 'the end',
+      from: endM,
+    }),
+    '. ',
   ];
 }
 
