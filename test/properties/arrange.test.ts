@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { arrange, type ArrangeRequest } from '../../lib/arrange/index.ts';
 import type { CostTable, Site, Unit } from '../../lib/model/index.ts';
+import { abutmentWindows, standBetween } from '../../lib/site/index.ts';
 import { demoRequests } from '../arrange/demoRequests.ts';
 import { demoSite, mirroredSite, type DemoZone } from '../arrange/demoSite.ts';
 import { demoTable } from '../arrange/demoTable.ts';
@@ -152,4 +153,42 @@ describe('arrange on random crossings', () => {
     },
     120_000,
   );
+
+  it('arrange never puts a support in a hard zone, nor a zone behind an abutment, wherever abutments stand in their windows', () => {
+    const share = fc.double({ min: 0, max: 1, noNaN: true });
+    const windows = fc.record({ start: share, end: share, startAt: share, endAt: share });
+    let found = 0;
+    let moved = 0;
+    fc.assert(
+      fc.property(
+        fc.oneof({ weight: 9, arbitrary: short }, { weight: 1, arbitrary: withApproaches }),
+        windows,
+        ({ site, table, request }, given) => {
+          // As far in as two windows of a random width each, both less than half the crossing.
+          const room = (part: number): number => 0.49 * part * site.lengthM;
+          const windowed: Site = {
+            ...site,
+            windows: {
+              startLatestM: site.startM + room(given.start),
+              endEarliestM: site.endM - room(given.end),
+            },
+          };
+          const { start, end } = abutmentWindows(windowed, request.pierHalfWidthM);
+          const startM = start[0] + given.startAt * (start[1] - start[0]);
+          const endM = end[1] - given.endAt * (end[1] - end[0]);
+          if (startM > start[0] || endM < end[1]) moved += 1;
+          for (const { fromM, toM } of site.zones) {
+            // What reaches over an end of the crossing is the brief's, and leaves that abutment no window.
+            const isBuried = (a: number, b: number): boolean => toM > a + 1e-9 && fromM < b - 1e-9;
+            expect(isBuried(site.startM, startM)).toBe(false);
+            expect(isBuried(endM, site.endM)).toBe(false);
+          }
+          found += expectLawful({ site: standBetween(windowed, startM, endM), table, request });
+        },
+      ),
+      { seed: 20260112, numRuns: 3000 },
+    );
+    expect(found).toBeGreaterThan(3000);
+    expect(moved).toBeGreaterThan(1000);
+  }, 120_000);
 });
