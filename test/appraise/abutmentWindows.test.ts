@@ -84,7 +84,7 @@ describe('appraise with windows for the abutments', () => {
     expect(fixed.options[0]).not.toHaveProperty('startM');
   });
 
-  it('appraise(mirrored windows) mirrors every arrangement and keeps its quantities', () => {
+  it('appraise(mirrored windows) mirrors every arrangement, and its cost as far as depths are chosen', () => {
     const there = windowed(both);
     const turned = mirrored(there);
     const { startM, endM } = there.brief.crossing;
@@ -105,11 +105,10 @@ describe('appraise with windows for the abutments', () => {
       const back = other.options.find(({ supports }) => supports.length === option.supports.length)!;
       expect(startM + endM - back.endM!).toBeCloseTo(option.startM!, 6);
       expect(startM + endM - back.startM!).toBeCloseTo(option.endM!, 6);
-      // A unit of uneven spans turned round is sized alike to within 0.02 %, plates being cut to length from one end: a depth
-      // on the edge of the flat of its cost may go one step of 50 mm the other way.
+      // A unit of uneven spans turned round is sized alike to within 0.02 %, plates being cut to length from one end; so a
+      // depth may go one step of 50 mm the other way on the edge of what counts as flat, 1 % of the cost.
       expect(Math.abs(back.depthM.midspan - option.depthM.midspan)).toBeLessThan(0.051);
-      // The ground is drawn along the road, so that a place near one end has other draws near the other.
-      expect(back.cost.p50 / option.cost.p50).toBeCloseTo(1, 2);
+      expect(Math.abs(back.cost.p50 / option.cost.p50 - 1)).toBeLessThan(0.01);
     });
   });
 
