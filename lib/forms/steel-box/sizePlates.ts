@@ -6,7 +6,7 @@ import type { BoxEffects } from './boxEffects.ts';
 import { stiffenedWebOf, type BoxPlates } from './boxSection.ts';
 import { boxUse, noBoxUse } from './boxUse.ts';
 import { steelBoxData } from './steelBoxData.ts';
-import { elementsPerSpan, type SteelBoxModel } from './steelBoxModel.ts';
+import type { SteelBoxModel } from './steelBoxModel.ts';
 import { patchResistanceKN, stiffenedWebShearKN } from './stiffenedWeb.ts';
 
 const use = noBoxUse();
@@ -83,19 +83,17 @@ export function pressedZones(model: SteelBoxModel, effects: BoxEffects): Uint8Ar
 /**
  * Thickness of deck and bottom plate by element, m, before they are stepped: each is moved by the stress it lacks or has to
  * spare a few times over.
- * @param leastBottomM thinnest bottom plate of every span, m
  */
 export function flangeNeeds(
   model: SteelBoxModel,
   effects: BoxEffects,
   plates: BoxPlates,
-  leastBottomM: readonly number[],
-): { readonly deck: Float64Array; readonly bottom: Float64Array } {
+): Pick<BoxPlates, 'deckM' | 'bottomM'> {
   const elements = model.elementM.length;
   const deck = new Float64Array(elements);
   const bottom = new Float64Array(elements);
   const { mostM: mostDeck } = steelBoxData.deckPlate;
-  const { mostM } = steelBoxData.bottom;
+  const { leastM, mostM } = steelBoxData.bottom;
   const widthM = model.task.deck.widthM;
   const ribM = model.rib.areaM2 / steelBoxData.rib.pitchM;
   // Both halves of symmetrical spans need the same.
@@ -119,17 +117,30 @@ export function flangeNeeds(
         model.deckM,
         Math.max(mostDeck, model.deckM),
       );
-      bottomM = clamp(
-        bottomM + (wantBottom - 1) * (bottomM + webPartM2 / bottomWidthM),
-        leastBottomM[Math.floor(e / elementsPerSpan)]!,
-        mostM,
-      );
+      bottomM = clamp(bottomM + (wantBottom - 1) * (bottomM + webPartM2 / bottomWidthM), leastM, mostM);
       if (Math.abs(deckM + bottomM - before) < 1e-4) break;
     }
     deck[e] = deckM;
     bottom[e] = bottomM;
   }
-  return { deck, bottom };
+  for (let e = half; e < elements; e++) {
+    deck[e] = deck[elements - 1 - e]!;
+    bottom[e] = bottom[elements - 1 - e]!;
+  }
+  return { deckM: deck, bottomM: bottom };
+}
+
+/** Most used flange of a box, shear of the webs included. */
+export function mostUsed(model: SteelBoxModel, effects: BoxEffects, plates: BoxPlates): number {
+  let most = 0;
+  for (let e = 0; e < model.elementM.length; e++) {
+    const webM = plates.webM[e]!;
+    boxUse(use, model, effects, e, plates.deckM[e]!, webM, plates.bottomM[e]!, plates.pressed[e] === 1);
+    const share = webShearKN(model, effects, e) / webResistanceKN(model, e, webM);
+    const bent = Math.max(use.deckSag, use.deckHog, use.bottomSag, use.bottomHog);
+    most = Math.max(most, bent + use.webShare * shearReduction(share), use.deckStage, use.bottomStage);
+  }
+  return most;
 }
 
 /** Bending that shear over half of its resistance takes away, per share of the webs (EN 1993-1-5 7.1, from memory). */
