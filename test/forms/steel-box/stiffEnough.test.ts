@@ -22,7 +22,7 @@ describe('stiffEnough(model, effects, now, strong, aim)', () => {
   });
 
   it('thickens where load and unit load bend the span most, and not where the moments turn', () => {
-    const { deckM, bottomM } = stiffEnough(model, effects, plates, thin, 0.97);
+    const { bottomM } = stiffEnough(model, effects, plates, thin, 0.97);
     expect(bottomM[middle]!).toBeGreaterThan(0.03);
     // A beam with haunches over its piers turns its moments at about a quarter of the span.
     const turning = Math.min(...bottomM.subarray(elementsPerSpan, middle));
