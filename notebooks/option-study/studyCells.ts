@@ -2,7 +2,7 @@ import { appraiseKept, depthTrials, formFacts, guide, memory, survey } from '../
 import type { Appraisal, AppraisedOption, RegisterEntry, Study } from '../../lib/index.ts';
 import type { Hold } from '../drawing/hold.ts';
 import type { InHand } from '../drawing/pierHandles.ts';
-import { share, untilDragRests, whenIdle, type StudyStore } from '../page/index.ts';
+import { idle, share, untilDragRests, whenIdle, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import { askedOf } from '../worked/askedOf.ts';
 import type { Appraiser } from '../worker/index.ts';
@@ -105,7 +105,9 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     async (v, run): Promise<readonly AppraisedOption[]> => {
       const option = v.last && referenceIn(v.last.appraisal, v.options.reference);
       if (!option || v.last.asked !== v.asked) return depths;
+      // What everything else hangs on is drawn first.
       await untilDragRests(run.signal);
+      await idle(run.signal);
       depths = await worker.workOut(v.asked, depthTrials(v.asked, option), run);
       return depths;
     },

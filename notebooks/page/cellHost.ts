@@ -1,10 +1,11 @@
 import { h } from '../html.ts';
 import type { HtmlChild } from '../html.ts';
 import type { Cell, Graph, Progress, State, Uses, Values } from '../reactive/index.ts';
-import { isDragging } from './dragging.ts';
 import type { Frames } from './frames.ts';
 import { lateness } from './lateness.ts';
 import { renew } from './renew.ts';
+import type { Rests } from './rests.ts';
+import type { Sight } from './sight.ts';
 import type { Way } from './refusal.ts';
 import { waysOn } from './refusal.ts';
 import type { StationState } from '../drawing/stationLine.ts';
@@ -52,8 +53,9 @@ export interface HostPage {
   readonly explain: (error: unknown, station: string) => Explained;
   /** The station where a cell of the graph is to be looked for. */
   readonly homeOf: (cellName: string) => string | undefined;
-  /** Whether something is being worked out elsewhere. */
-  readonly isBusy: () => boolean;
+  /** Where what is off the screen waits to be drawn. */
+  readonly rests: Rests;
+  readonly sight: Sight;
   /** The station this one waits for, if any. */
   readonly waitsFor: (station: string) => string | undefined;
   /** The state of a station, or the place of something, has changed. */
@@ -84,8 +86,8 @@ const clock = (date: Date): string =>
 /** A drawing that stands in a body for itself, not one in a table or a field. */
 const ownDrawing = ':scope > svg.drawing, :scope > * > svg.drawing';
 
-/** How far outside the screen a cell still counts as on it. */
-const NEAR = '25%';
+/** How far a slow run has come is said again after so long, ms: each word of it costs the page a frame. */
+const SAY_EVERY_MS = 250;
 
 /** What a slow run says of itself: 'being worked out: 120 of 480, sizing spans'. */
 const progressWords = (progress: Progress | undefined): string =>
@@ -101,6 +103,7 @@ const progressWords = (progress: Progress | undefined): string =>
 export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>): CellHost {
   const { graph, frames } = page;
   const { station, title } = spec;
+  const place = Number(station.replace('+', '.'));
   const label = h('a', { class: 'station', href: `#${station}` }, station);
   const body = h('div', { class: 'body' });
   const notes =
@@ -131,6 +134,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   let bodyPx = 0;
   /** Whether it is on the screen or about to be. */
   let isNear = true;
+  let saidAt = -Infinity;
   let isOwed = false;
   let bodyError: unknown;
   /** Its size has changed, and with it the places of the stations below. */
@@ -142,6 +146,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   /** What failed: its own values, or something they are made from by and by. */
   const failedState = () => [state, ...awaited.values()].find((one) => one.state === 'failed');
   const isWaiting = (): boolean => [state, ...awaited.values()].some((one) => one.state === 'pending');
+  /** Whether what is drawn is not what its cells have come to. */
+  const isBehind = (): boolean => 'value' in state && drawn?.values !== state.value;
 
   const stationState = (): StationState => {
     if (bodyError !== undefined) return 'failed';
@@ -150,6 +156,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       const home = page.homeOf(failed.raisedBy) ?? station;
       return home === station ? 'failed' : 'held';
     }
+    if (isBehind() && (!isNear || late.isLate())) return 'pending';
     return isWaiting() && late.isLate() ? 'pending' : 'done';
   };
 
@@ -159,6 +166,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   };
 
   const draw = (): void => {
+    // Off the screen its width may never have been observed.
+    if (!isNear) bodyPx ||= body.clientWidth;
     const widthPx = paper?.widthPx ?? bodyPx;
     const values = 'value' in state ? state.value : undefined;
     if (values === undefined || widthPx === 0) return;
@@ -198,24 +207,35 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     return `held at the last good figures${failed === undefined ? '' : `, because ${failed} has failed`}`;
   };
 
-  const say = (now: StationState): void => {
-    if (now === 'failed') sayFailure();
-    else failure.replaceChildren();
+  const wordsOf = (now: StationState): string => {
+    if (now !== 'held' && now !== 'pending') return '';
+    if (now === 'held') return heldWords();
     const since = drawn === undefined || drawnAt === undefined ? '' : `; drawn as of ${clock(drawnAt)}`;
-    const words = now === 'held' ? heldWords() : now === 'pending' ? `${pendingWords()}${since}` : '';
+    return `${pendingWords()}${since}`;
+  };
+  const say = (now: StationState): void => {
+    saidAt = performance.now();
+    if (now === 'failed') sayFailure();
+    else if (failure.firstChild !== null) failure.replaceChildren();
+    const words = wordsOf(now);
     if (status.textContent !== words) status.textContent = words;
   };
 
-  /** While something is dragged or worked out the time belongs to what is seen; the rest is drawn once, at the end. */
-  const canWait = (): boolean => !isNear && paper === null && (isDragging() || page.isBusy());
-
+  /** The time belongs to what is seen: the rest is drawn when the page has nothing better to do, and on paper. */
   const update = (): void => {
-    const waits = canWait();
-    if (waits) updateSoon();
-    else draw();
+    if (isNear || paper !== null) return drawAndSay();
+    page.rests.put(drawAndSay, place);
+    if (element.dataset['state'] !== stationState()) saySoFar();
+  };
+  const drawAndSay = (): void => {
+    page.rests.drop(drawAndSay);
+    draw();
+    late.set(isWaiting());
+    saySoFar();
+  };
+  const saySoFar = (): void => {
     const now = stationState();
     const isSame = element.dataset['state'] === now;
-    if (waits && isSame) return;
     say(now);
     if (!isSame) {
       element.dataset['state'] = now;
@@ -233,7 +253,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
 
   const show = (next: State<Values<U>>): void => {
     state = next;
-    late.set(isWaiting());
+    late.set(isWaiting() || isBehind());
     if (next.state !== 'pending') progress = undefined;
     updateSoon();
   };
@@ -263,10 +283,10 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
           if (awaits.includes(cell)) {
             const isNews = awaited.get(cell)?.state !== one.state;
             awaited.set(cell, one);
-            late.set(isWaiting());
+            late.set(isWaiting() || isBehind());
             if (isNews) updateSoon();
           }
-          if (late.isLate()) updateSoon();
+          if (isNear && late.isLate() && performance.now() - saidAt > SAY_EVERY_MS) updateSoon();
         };
         stops.push(graph.watch(cell, watch));
       }
@@ -276,13 +296,16 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
         updateSoon();
       });
       watcher.observe(body);
-      const sight = new IntersectionObserver((seen) => (isNear = seen.at(-1)!.isIntersecting), {
-        rootMargin: NEAR,
+      const sight = page.sight.watch(element, (next) => {
+        isNear = next;
+        if (!isNear) return;
+        page.rests.look(place);
+        updateSoon();
       });
-      sight.observe(element);
       stops.push(
         () => watcher.disconnect(),
-        () => sight.disconnect(),
+        sight,
+        () => page.rests.drop(drawAndSay),
       );
     },
     setPaper(room) {

@@ -41,6 +41,6 @@ export {
 export { deviceCupboard } from './cupboard.ts';
 export { isOf, journal, type Journal, type Unsaved } from './journal.ts';
 export { keeping, type Keeping, type KeepingSpec } from './keeping.ts';
-export { whenIdle } from './whenIdle.ts';
+export { idle, whenIdle } from './whenIdle.ts';
 export { readOnly } from './readOnly.ts';
 export { openFile, saveFile, textOf } from './files.ts';

@@ -6,12 +6,16 @@ import { cellHost } from './cellHost.ts';
 import { exchange } from './exchange.ts';
 import { frames, screenFrames } from './frames.ts';
 import { lateness } from './lateness.ts';
+import { isDragging } from './dragging.ts';
 import { drawingActions } from './drawingFile.ts';
+import { rests as newRests } from './rests.ts';
+import { sight as newSight } from './sight.ts';
 import { saveTables } from './tableFile.ts';
 import type { LineSection } from './stationLines.ts';
 import { stationLines } from './stationLines.ts';
 import type { Station } from './ties.ts';
 import { homeOf, tiesOf } from './ties.ts';
+import { whenIdle } from './whenIdle.ts';
 
 /** The line above the title: names of the pages at the left, what can be done at the right. */
 export interface BarSpec {
@@ -66,6 +70,9 @@ export interface Sheet {
 
 /** Body and wide body of the printed sheet, px: 980 px are 259 m at 1:1000. */
 const PAPER = { body: 980, wide: 1224 } as const;
+
+/** Whether everything has been drawn is asked again after so long, ms. */
+const SKIP_ASK_MS = 300;
 
 const usualHint = 'Point at a cell: solid spans come from what it uses, dashed ones go to what uses it.';
 
@@ -123,16 +130,19 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
   const ties = () => tiesOf(known, (cell) => graph.uses(cell));
   const lines = stationLines(element, () => sections, ties, queue);
 
+  const isBusy = (): boolean =>
+    graph
+      .cells()
+      .some((cell) => cell.kind === 'slow' && !aside.includes(cell) && graph.state(cell).state === 'pending');
+  const rests = newRests({ isFree: () => !isDragging() && !isBusy(), whenIdle, later: setTimeout });
+  const sight = newSight();
+
   const page = {
     graph,
     frames: queue,
     explain,
-    isBusy: () =>
-      graph
-        .cells()
-        .some(
-          (cell) => cell.kind === 'slow' && !aside.includes(cell) && graph.state(cell).state === 'pending',
-        ),
+    rests,
+    sight,
     homeOf: (cellName: string) => homeOf(cellName, known, (cell) => graph.uses(cell)),
     waitsFor(station: string) {
       const above = new Set(ties().get(station)?.uses);
@@ -212,6 +222,18 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
         host.begin();
         stops.push(host.end);
       }
+      // Once everything has been drawn its height is known, and what is off the screen need not be laid out any more.
+      let asking: ReturnType<typeof setTimeout> | undefined;
+      const skip = (): void => {
+        if (hosts().some((host) => host.element.dataset['state'] === 'pending'))
+          asking = setTimeout(() => rests.put(skip, Infinity), SKIP_ASK_MS);
+        else element.classList.add('skips');
+      };
+      stops.push(
+        () => clearTimeout(asking),
+        () => rests.drop(skip),
+      );
+      skip();
       const before = onPaper(true);
       const after = onPaper(false);
       window.addEventListener('beforeprint', before);

@@ -60,16 +60,28 @@ export function stationLines(
 
   const hosts = (): CellHost[] => sections().flatMap((section) => section.hosts);
 
+  /** How far below the top of its section the middle of each station was when it was last laid out, px. */
+  const below = new WeakMap<CellHost, number>();
+  const placeOf = (host: CellHost, sectionTop: number): number => {
+    // To ask for the place of what is off the screen would lay it out.
+    if (host.label.checkVisibility({ contentVisibilityAuto: true }) || !below.has(host))
+      below.set(host, middleOf(host.label, sheet) - sectionTop);
+    return sectionTop + below.get(host)!;
+  };
+
   const marks = (): StationMark[] =>
-    sections().flatMap(({ number, element, hosts: cells }) => [
-      // The post stands level with the rule over the section.
-      { name: String(number), y: topOf(element, sheet), post: true },
-      ...cells.map((host) => ({
-        name: host.station,
-        y: middleOf(host.label, sheet),
-        state: host.state(),
-      })),
-    ]);
+    sections().flatMap(({ number, element, hosts: cells }) => {
+      const top = topOf(element, sheet);
+      return [
+        // The post stands level with the rule over the section.
+        { name: String(number), y: top, post: true },
+        ...cells.map((host) => ({
+          name: host.station,
+          y: placeOf(host, top),
+          state: host.state(),
+        })),
+      ];
+    });
 
   const drawUpright = (): void => {
     const top = -sheet.getBoundingClientRect().top;

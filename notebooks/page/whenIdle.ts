@@ -1,6 +1,21 @@
-/** Runs a job once the page has nothing else to do. */
-export function whenIdle(job: () => void): void {
-  // Not every browser tells.
-  if ('requestIdleCallback' in window) window.requestIdleCallback(() => job());
-  else setTimeout(job, 300);
+/** Told to a job run in an idle moment: how long it lasts, ms. */
+export type TimeLeft = () => number;
+
+/** Where a browser does not tell when it is idle: an idle moment is taken to come after `wait` and to last for `lasts`, ms. */
+const GUESS = { wait: 50, lasts: 8 } as const;
+
+/** Runs a job once the page has nothing else to do, and tells it how much of that moment is left. */
+export function whenIdle(job: (timeLeft: TimeLeft) => void): void {
+  if ('requestIdleCallback' in window) {
+    window.requestIdleCallback((moment) => job(() => moment.timeRemaining()));
+    return;
+  }
+  setTimeout(() => {
+    const end = performance.now() + GUESS.lasts;
+    job(() => end - performance.now());
+  }, GUESS.wait);
 }
+
+/** Resolves once the page has nothing else to do; never after `signal` has been aborted. */
+export const idle = (signal: AbortSignal): Promise<void> =>
+  new Promise((resolve) => whenIdle(() => signal.aborted || resolve()));

@@ -30,6 +30,9 @@ const PAUSE_MS = 150;
 
 const FIGURES = '[data-figure]';
 
+/** Where figures are not seen: told without asking what is laid out, which would lay out all that is off the screen. */
+const FOLDED = 'details:not([open]), [hidden], .on-paper';
+
 const isSeen = (element: Element): boolean => element.getClientRects().length > 0;
 
 /** Where the answers of a part of the page stand: under its body, never over it. */
@@ -57,7 +60,8 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
   let isPending = false;
 
   const figuresOf = (host: Element): Element[] => Array.from(host.querySelectorAll(FIGURES)).filter(isSeen);
-  const hasFigures = (host: Element): boolean => Array.from(host.querySelectorAll(FIGURES)).some(isSeen);
+  const hasFigures = (host: Element): boolean =>
+    Array.from(host.querySelectorAll(FIGURES)).some((figure) => figure.closest(FOLDED) === null);
 
   const show = (): void => {
     if (ask === null) return;
@@ -173,7 +177,7 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
 
   const redrawn = new Set<Element>();
   let timer: ReturnType<typeof setTimeout> | undefined;
-  /** What the keyboard can walk is found out once drawing has paused: telling what is seen costs the page a layout. */
+  /** What the keyboard can walk is found out once drawing has paused. */
   const walkAgain = (): void => {
     for (const cell of redrawn) hostOf(cell).walk?.update();
     redrawn.clear();

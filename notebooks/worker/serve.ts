@@ -4,11 +4,17 @@ import { sliced } from './sliced.ts';
 import type { Slicing } from './sliced.ts';
 import { transferables } from './transferables.ts';
 
+/** How the work is cut, and how often the page is told how far it has come. */
+interface Serving extends Pick<Slicing, 'now' | 'budgetMs' | 'breathe'> {
+  /** From one word of progress to the next, ms; after every slice unless given. Each of them costs the page time. */
+  readonly tellEveryMs?: number;
+}
+
 /**
  * Answers the wishes that come down the line with the jobs given, several at a time by turns. Results move rather
  * than being copied where they can, so a job must not keep arrays that it hands out.
  */
-export function serve(line: Line, jobs: Jobs, slicing: Pick<Slicing, 'now' | 'budgetMs' | 'breathe'>): void {
+export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: Serving): void {
   const live = new Map<number, AbortController>();
   const say = (answer: Answer, transfer: Transferable[] = []): void => line.postMessage(answer, { transfer });
 
@@ -19,7 +25,13 @@ export function serve(line: Line, jobs: Jobs, slicing: Pick<Slicing, 'now' | 'bu
     try {
       const start = jobs[job];
       if (!start) throw new Error(`job '${job}': expected one of ${Object.keys(jobs).join(', ')}`);
-      const report = (progress: Progress): void => say({ id, progress });
+      let toldAt = -Infinity;
+      const report = (progress: Progress): void => {
+        const now = slicing.now();
+        if (now - toldAt < tellEveryMs) return;
+        toldAt = now;
+        say({ id, progress });
+      };
       const value = await sliced(start(arg as never), { ...slicing, signal, report });
       say({ id, value }, transferables(value));
     } catch (error) {

@@ -19,6 +19,8 @@ interface Drag {
   readonly updates: number;
   readonly ms: number;
   readonly longestFrameMs: number;
+  /** From the release until what is on the screen was drawn for the last time, and until everything was. */
+  readonly visibleMs: number;
   readonly releaseMs: number;
 }
 
@@ -43,6 +45,7 @@ function watchPage(): void {
   let began = 0;
   let ended = 0;
   let lastDrawn = 0;
+  let lastVisible = 0;
   let longest = 0;
   let isDragging = false;
   /** A drawing is changed in place: new nodes, moved marks and other words all count. */
@@ -71,16 +74,40 @@ function watchPage(): void {
     },
     release() {
       isDragging = false;
-      ended = lastDrawn = performance.now();
-      const bodies = document.querySelectorAll('.section .body, .section .notes, header .live');
-      const drawing = new MutationObserver(() => {
-        requestAnimationFrame(() => (lastDrawn = performance.now()));
+      ended = lastDrawn = lastVisible = performance.now();
+      // Which parts are on the screen is told by the browser: to ask for their places would lay the page out.
+      const onScreen = new Set<Element>();
+      const sight = new IntersectionObserver((entries) => {
+        for (const { target, isIntersecting } of entries) {
+          if (isIntersecting) onScreen.add(target);
+          else onScreen.delete(target);
+        }
       });
-      for (const body of bodies) drawing.observe(body, whatever);
+      const bodies = document.querySelectorAll('.section .body, .section .notes, header .live, h2 .live');
+      const drawing = new MutationObserver((records) => {
+        const isSeen = records.some(({ target }) => {
+          const element = target instanceof Element ? target : target.parentElement;
+          return onScreen.has(element?.closest('.body, .notes, .live') ?? document.body);
+        });
+        requestAnimationFrame(() => {
+          lastDrawn = performance.now();
+          if (isSeen) lastVisible = lastDrawn;
+        });
+      });
+      for (const body of bodies) {
+        sight.observe(body);
+        drawing.observe(body, whatever);
+      }
     },
     async result() {
       while (performance.now() - lastDrawn < 1500) await new Promise((resolve) => setTimeout(resolve, 50));
-      return { updates, ms: ended - began, longestFrameMs: longest, releaseMs: lastDrawn - ended };
+      return {
+        updates,
+        ms: ended - began,
+        longestFrameMs: longest,
+        visibleMs: lastVisible - ended,
+        releaseMs: lastDrawn - ended,
+      };
     },
   };
   Object.assign(window, { watched });
@@ -142,12 +169,13 @@ try {
       ['no-pier width', '1+020'],
       ['steel rate', '7+005'],
     ] as const) {
-      const { updates, ms, longestFrameMs, releaseMs, busyMs } = await drag(page, name, station);
+      const { updates, ms, longestFrameMs, visibleMs, releaseMs, busyMs } = await drag(page, name, station);
       const figures = [
         `${((1000 * updates) / ms).toFixed(0)} updates a second`,
         `${(busyMs / Math.max(1, updates)).toFixed(0)} ms of the page's thread each`,
         `longest frame ${longestFrameMs.toFixed(0)} ms`,
-        `all drawn ${releaseMs.toFixed(0)} ms after release`,
+        `on the screen drawn ${visibleMs.toFixed(0)} ms after release`,
+        `all drawn ${releaseMs.toFixed(0)} ms`,
       ];
       console.log(`  ${name}: ${figures.join(', ')}`);
     }

@@ -183,12 +183,14 @@ describe('span chart', () => {
       await page.getByRole('spinbutton', { name: 'clear opening' }).press('ArrowUp');
       await said(page, '[id="1+020"] .limit', words);
       await said(page, '[id="3+010"] .limit', words);
+      await settled(page);
     };
     await step('64 m asked');
     expect(await standing()).toEqual(['4+010']);
     // The next bucket of what was built begins at 75 m.
     await type(page, 'clear opening', '71');
     await said(page, '[id="1+020"] .limit', '74 m asked');
+    await settled(page);
     expect(await standing()).toEqual(['4+010']);
     await step('75 m asked');
     await said(page, '#s4 .finding', '75 to 100 m');
