@@ -22,13 +22,13 @@ function place(lasts = 50) {
     done,
     job,
     setFree: (now: boolean) => (isFree = now),
-    idle() {
+    idle: (): void => {
       const now = moments;
       moments = [];
       left = lasts;
       for (const run of now) run(() => left);
     },
-    time() {
+    time: (): void => {
       const now = timers;
       timers = [];
       for (const run of now) run();
