@@ -9,7 +9,7 @@ const nose = z.object({ noseOverSpan: number, noseOverDeckWeight: number });
 export const erectionData = z
   .object({
     launch: z.object({ steel: nose, concrete: nose, tipping: number, leastBedM: number, source }),
-    crane: z.object({ besideDeckM: number, chartShare: number, source }),
+    crane: z.object({ besideDeckM: number, afloatReachM: number, chartShare: number, source }),
     halves: z.object({ laneM: number, barrierM: number, source }),
   })
   .parse(raw);

@@ -175,8 +175,6 @@ export const factFigures: readonly Descriptor[] = [
   ...methodFactFigures,
   asIs('haulLengthM', () => ({ given: 'brief/access/haulLengthM' })),
   asIs('haulMassT', () => ({ given: 'brief/access/haulMassT' })),
-  asIs('craneStands', () => ({ given: 'brief/access/crane' })),
-  asIs('bargeReaches', () => ({ given: 'brief/access/barge' })),
   {
     ...asIs('budgetChance', (at) => ({ chance: `standing/within/${at.option.number}` })),
     when: (at) => at.study.brief.budget !== 'unknown',

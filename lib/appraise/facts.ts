@@ -131,8 +131,6 @@ export function optionFacts(
     pieceMassT: Math.max(0, ...pieces.map((piece) => piece.massT)),
     haulLengthM: access.haulLengthM,
     haulMassT: access.haulMassT,
-    craneStands: access.crane,
-    bargeReaches: access.barge,
     budgetChance,
     roadRiseM: Math.max(option.profile.startRiseM, option.profile.endRiseM),
     roadMayRiseM: site.road.mayRiseM,

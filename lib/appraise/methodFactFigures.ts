@@ -1,7 +1,7 @@
 import type { At, Descriptor } from '../model/index.ts';
 import { girderLines } from '../takeoff/index.ts';
 import { asIs, fact, factOf } from './factFigure.ts';
-import { halfDeckNeeded } from './methodFacts.ts';
+import { halfDeckNeeded, spansOffWater } from './methodFacts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
 
 const zones = (at: At, ...kinds: readonly string[]): string[] =>
@@ -31,6 +31,21 @@ const linesPath = (at: At): string[] => {
 export const methodFactFigures: readonly Descriptor[] = [
   fact('craneOnSite', factOf('craneOnSite').meaning, () => ({ crane: 'brief/access/crane' })),
   fact('bargeOnSite', factOf('bargeOnSite').meaning, () => ({ barge: 'brief/access/barge' })),
+  fact(
+    'spansOffWater',
+    'count of the spans whose middle lies farther from every water than a crane on a barge reaches',
+    (at) => ({
+      supports: at.option.units.flatMap(({ supportsM }, u) =>
+        supportsM.map((_, s) => `${at.root}/units/${u}/supportsM/${s}`),
+      ),
+      waters: ends(at, 'waters'),
+      reach: 'data/erection/crane/afloatReachM',
+    }),
+    ({ supports, waters, reach }) => {
+      const bodies = waters.flatMap((fromM, i) => (i % 2 === 0 ? [{ fromM, toM: waters[i + 1]! }] : []));
+      return spansOffWater(bodies, supports, reach);
+    },
+  ),
   fact('falseworkOverRoad', factOf('falseworkOverRoad').meaning, (at) => ({
     stretches: zones(at, 'road'),
     ends: [at.ends.start, at.ends.end],

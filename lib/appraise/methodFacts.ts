@@ -42,6 +42,21 @@ export function halfDeckNeeded(lanes: number): number {
 export const widening = (deck: readonly DeckStrip[]): number =>
   deck.reduce((sum, { widthM, ultimateWidthM }) => sum + Math.max(0, ultimateWidthM - widthM), 0);
 
+/**
+ * Spans whose middle lies farther from all waters, at their ordinary levels, than a crane on a barge reaches, m. Chainages
+ * of the supports in order; two units that meet have theirs twice.
+ */
+export const spansOffWater = (
+  waters: readonly { readonly fromM: number; readonly toM: number }[],
+  supportsM: readonly number[],
+  reachM: number,
+): number =>
+  supportsM.slice(1).filter((toM, i) => {
+    const middleM = (supportsM[i]! + toM) / 2;
+    const isOff = waters.every((water) => Math.max(water.fromM - middleM, middleM - water.toM) > reachM);
+    return toM > supportsM[i]! && isOff;
+  }).length;
+
 /** Plant and place: what the method needs beside the bridge against what the brief says there is. */
 function plantFacts(site: Site, { method, units, designs }: WorkedOption, { access }: Brief): Known {
   const main = mainUnit(units);
@@ -89,6 +104,11 @@ export function methodFacts(site: Site, option: WorkedOption, brief: Brief): Kno
   return {
     craneOnSite: brief.access.crane,
     bargeOnSite: brief.access.barge,
+    spansOffWater: spansOffWater(
+      site.waters,
+      option.units.flatMap(({ supportsM }) => supportsM),
+      erectionData.crane.afloatReachM,
+    ),
     ...plantFacts(site, option, brief),
     ...demandFacts(site, option, brief),
     ...(spare ? { trafficSpareM: spare.spareM } : {}),
