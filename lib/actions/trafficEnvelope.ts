@@ -1,13 +1,14 @@
 import {
   addLine,
-  addLoadMoment,
-  addLoadShear,
   beamTrack,
   deflectionLine,
+  sectionLine,
   sources,
+  stretchOf,
   uniform,
   type Extremes,
   type LineBeam,
+  type Stretch,
 } from '../mechanics/index.ts';
 import { loadStandard } from './loadStandard.ts';
 import { plainQuest, trafficOnLine } from './trafficOnLine.ts';
@@ -64,33 +65,36 @@ export function trafficEnvelope(
   const T = new Float64Array(4 * (n - 1));
   const line = new Float64Array(4 * (n - 1));
   const at = sources(beam);
-  const shear = (s: number): void => {
-    line.set(Q);
-    addLoadShear(line, s);
-    beyond =
-      trafficOnLine(shearLoad, track, line, { section: s, hogging: false, innerReaction: false }, out) ||
-      beyond;
+  const reactionsAt = new Map<number, number[]>();
+  at.forEach((station, j) => reactionsAt.set(station, [...(reactionsAt.get(station) ?? []), j]));
+  const shear = (s: number, stretch: Stretch): void => {
+    const of = { stretch, station: s, arm: 1, turn: 0 };
+    sectionLine(of, line);
+    const quest = { section: s, hogging: false, innerReaction: false, of };
+    beyond = trafficOnLine(shearLoad, track, line, quest, out) || beyond;
     result.shearMaxKN[s] = Math.max(result.shearMaxKN[s]!, out.max);
     result.shearMinKN[s] = Math.min(result.shearMinKN[s]!, out.min);
   };
   if (beam.startMomentLine) addLine(T, -1, beam.startMomentLine);
+  let stretch = stretchOf(xM, Q, T);
   for (let s = 0; s < n; s++) {
     const x = xM[s]!;
-    for (let i = 0; i < line.length; i++) line[i] = x * Q[i]! - T[i]!;
-    addLoadMoment(line, xM, s);
+    const of = { stretch, station: s, arm: x, turn: 1 };
+    sectionLine(of, line);
     // Along a span the hogging part has the same sign as under a uniform load (points of contraflexure).
-    const quest = { section: s, hogging: hogs[s]! < -1e-9 * x * x, innerReaction: false };
+    const quest = { section: s, hogging: hogs[s]! < -1e-9 * x * x, innerReaction: false, of };
     beyond = trafficOnLine(load, track, line, quest, out) || beyond;
     result.momentMaxKNm[s] = out.max;
     result.momentMinKNm[s] = out.min;
 
-    const here = at.flatMap((station, j) => (station === s ? [j] : []));
-    if (s > 0) shear(s);
+    const here = reactionsAt.get(s) ?? [];
+    if (s > 0) shear(s, stretch);
     for (const j of here) {
       addLine(Q, 1, beam.reactionLines[j]!);
       addLine(T, x, beam.reactionLines[j]!);
     }
-    if (s < n - 1 && (here.length > 0 || s === 0)) shear(s);
+    if (here.length > 0) stretch = stretchOf(xM, Q, T);
+    if (s < n - 1 && (here.length > 0 || s === 0)) shear(s, stretch);
   }
 
   const supports = beam.supportAt.length;

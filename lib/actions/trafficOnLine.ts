@@ -4,6 +4,7 @@ import {
   runTwoGroups,
   type Extremes,
   type LineAreas,
+  type StretchSection,
   type Track,
 } from '../mechanics/index.ts';
 import { axleGroups } from './axleGroups.ts';
@@ -18,6 +19,8 @@ export interface LineQuest {
   readonly hogging: boolean;
   /** Reaction of an inner support: two vehicles count towards the greatest value. */
   readonly innerReaction: boolean;
+  /** What the line of a section of a beam is made of, where it is known. */
+  readonly of?: StretchSection;
 }
 
 export const plainQuest: LineQuest = { section: -1, hogging: false, innerReaction: false };
@@ -47,7 +50,7 @@ export function trafficOnLine(
   let pairMax = 0;
   let pairMin = 0;
   for (const group of groups.usual) {
-    const placings = runGroup(track, group, line, quest.section, run);
+    const placings = runGroup(track, group, line, quest.section, run, quest.of);
     max = Math.max(max, run.max);
     min = Math.min(min, run.min);
     if (two?.groups.has(group)) {
@@ -62,7 +65,7 @@ export function trafficOnLine(
   const pairLeast = pairShare * (vehicleFactor * pairMin + udlKNm * negative);
   if (quest.hogging && vehicleFactor * groups.longerKN * lowestOf(line) + udlKNm * negative < pairLeast) {
     for (const group of groups.longer) {
-      runGroup(track, group, line, quest.section, run);
+      runGroup(track, group, line, quest.section, run, quest.of);
       min = Math.min(min, run.min);
     }
   }

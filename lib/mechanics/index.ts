@@ -17,18 +17,11 @@ export {
   shearInfluence,
   springInfluence,
 } from './beam/influence.ts';
-export {
-  addLine,
-  addLoadMoment,
-  addLoadShear,
-  deflectionLine,
-  momentLine,
-  shearLine,
-  sources,
-} from './beam/influence.ts';
+export { addLine, deflectionLine, momentLine, shearLine, sources } from './beam/influence.ts';
 export { loadTrack, reversed, type AxleGroup, type Track } from './placing/track.ts';
 export { beamTrack, straightLine } from './placing/beamTrack.ts';
 export { runGroup, type Extremes } from './placing/axles.ts';
+export { sectionLine, stretchOf, type Stretch, type StretchSection } from './placing/stretch.ts';
 export { runTwoGroups } from './placing/twoGroups.ts';
 export { lineAreas, type LineAreas } from './placing/areas.ts';
 export {

@@ -14,7 +14,7 @@ export function addLine(A: Float64Array, factor: number, B: Float64Array): void 
 }
 
 /** Adds -(x_s - x)+, the moment at station s of a unit load to its left. */
-export function addLoadMoment(line: Float64Array, xM: Float64Array, station: number): void {
+function addLoadMoment(line: Float64Array, xM: Float64Array, station: number): void {
   const at = xM[station]!;
   for (let e = 0; e < station; e++) {
     line[4 * e]! -= at - xM[e]!;
@@ -25,7 +25,7 @@ export function addLoadMoment(line: Float64Array, xM: Float64Array, station: num
 }
 
 /** Adds -1 to the left of station s, the shear there of a unit load to its left. */
-export function addLoadShear(line: Float64Array, station: number): void {
+function addLoadShear(line: Float64Array, station: number): void {
   for (let e = 0; e < station; e++) {
     line[4 * e]! -= 1;
     line[4 * e + 2]! -= 1;

@@ -1,3 +1,5 @@
+import { sumSection, type StretchSection } from './stretch.ts';
+import { sumPlacings } from './sumPlacings.ts';
 import { placingsOf, weighAxle, type AxleGroup, type Placings, type Track } from './track.ts';
 
 /** Greatest and least effect of a group; both include 0, the group being off the structure. */
@@ -11,6 +13,7 @@ export interface Extremes {
  * them and its neighbours, and every axle on the section itself, where the line has its peak or jump.
  * @param line element line on the stations of the track
  * @param section station of the section the line belongs to, or -1 for a line without peak or jump (reaction, deflection)
+ * @param of what the line is made of, where it is that of a section of a stretch: a short cut to the same sums
  * @returns the placings, which hold the sums of this line until the next run
  */
 export function runGroup(
@@ -19,11 +22,12 @@ export function runGroup(
   line: Float64Array,
   section: number,
   out: Extremes,
+  of?: StretchSection,
 ): Placings {
   const placings = placingsOf(track, group);
   const { positive, negative, swept } = placings;
-  const axles = group.atM.length;
-  sumPlacings(placings, line, axles, group.whole, 0, swept);
+  if (of && group.whole) sumSection(track, group, line, of);
+  else sumPlacings(placings, group, line, 0, swept);
   let top = 0;
   let bottom = 0;
   for (let k = 1; k < swept; k++) {
@@ -36,36 +40,6 @@ export function runGroup(
   if (out.min < 0) out.min = Math.min(out.min, vertexValue(track, group, placings, line, bottom, -1));
   if (section >= 0) onSection(placings, group, line, section, track.xM.length, out);
   return placings;
-}
-
-/** Sums of the axles that add and of those that take away in placings `from` to `to`; of a whole group all axles in both. */
-function sumPlacings(
-  placings: Placings,
-  line: Float64Array,
-  axles: number,
-  whole: boolean,
-  from: number,
-  to: number,
-): void {
-  const { entry, weight, positive, negative } = placings;
-  let at = from * axles;
-  for (let k = from; k < to; k++) {
-    let all = 0;
-    let adds = 0;
-    for (let i = 0; i < axles; i++, at++) {
-      const e = entry[at]!;
-      const w = 4 * at;
-      const value =
-        weight[w]! * line[e]! +
-        weight[w + 1]! * line[e + 1]! +
-        weight[w + 2]! * line[e + 2]! +
-        weight[w + 3]! * line[e + 3]!;
-      all += value;
-      adds += Math.max(0, value);
-    }
-    positive[k] = whole ? all : adds;
-    negative[k] = whole ? all : all - adds;
-  }
 }
 
 /**
@@ -140,7 +114,7 @@ function onSection(
   const after = 4 * section < line.length ? line[4 * section]! : before;
   for (let i = 0; i < group.atM.length; i++) {
     const k = onStation[i * stations + section]!;
-    if (k >= swept) sumPlacings(placings, line, group.atM.length, whole, k, k + 1);
+    if (k >= swept) sumPlacings(placings, group, line, k, k + 1);
     const load = group.loadKN[i]!;
     const toLeftMax = load * (whole ? before - after : Math.max(before, 0) - Math.max(after, 0));
     const toLeftMin = load * (whole ? before - after : Math.min(before, 0) - Math.min(after, 0));
