@@ -2,10 +2,10 @@ import type { CostTable, Site } from '../model/index.ts';
 import { kindOf, type Candidate } from './candidate.ts';
 import { continuousCandidates } from './continuous.ts';
 import { counter, type Counter } from './counter.ts';
-import { SAME_M, frameOf, type Frame } from './frame.ts';
+import { SAME_M, barredOf, frameOf, type Barred, type Frame } from './frame.ts';
 import { mainUnitCandidates } from './mainUnits.ts';
 import { polish } from './polish.ts';
-import { flatTable, relaxationsOf } from './relaxations.ts';
+import { flatTable, relaxationsOf, type Fits } from './relaxations.ts';
 import { KEPT, type ArrangeRequest, type ArrangeResult } from './request.ts';
 import { select } from './select.ts';
 
@@ -26,14 +26,26 @@ function frameFor(request: ArrangeRequest, site: Site, table: CostTable): Frame 
 }
 
 /** Whether the longest span allowed reaches over every barred stretch: where it does not, nothing needs to be searched. */
-function reachesOver({ windows, approach }: ArrangeRequest, { barred, lengthM }: Frame): boolean {
+function reachesOver(
+  { windows, approach }: ArrangeRequest,
+  barred: readonly Barred[],
+  lengthM: number,
+): boolean {
   const longestM = Math.max(windows.maxSpanM, approach?.maxSpanM ?? 0) + SAME_M;
   return barred.every(({ fromM, toM }) => Math.min(toM, lengthM) - Math.max(fromM, 0) <= longestM);
 }
 
-function fits(request: ArrangeRequest, site: Site): boolean {
-  const frame = frameFor(request, site, flatTable);
-  return reachesOver(request, frame) && candidatesOf(request, frame, flatTable, counter(), 1).length > 0;
+/** Whether anything fits, where cost plays no part: the places on a site are then the same for all windows, and kept. */
+function fitter(): Fits {
+  const frames = new Map<Site, Frame>();
+  return (request, site) => {
+    const known = frames.get(site);
+    const barred = known?.barred ?? barredOf(site, request.pierHalfWidthM);
+    if (!reachesOver(request, barred, site.lengthM)) return false;
+    const frame = known ?? frameFor(request, site, flatTable);
+    frames.set(site, frame);
+    return candidatesOf(request, frame, flatTable, counter(), 1).length > 0;
+  };
 }
 
 /**
@@ -61,6 +73,6 @@ export function arrange(request: ArrangeRequest, site: Site, table: CostTable): 
   return {
     arrangements: kept.map(({ units, cost }) => ({ form, method, units, tableCost: cost })),
     dropped: dropped.list(form),
-    relaxations: kept.length > 0 ? [] : relaxationsOf(request, site, fits),
+    relaxations: kept.length > 0 ? [] : relaxationsOf(request, site, fitter()),
   };
 }

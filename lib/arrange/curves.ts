@@ -1,5 +1,5 @@
 import type { CostTable, FormId, Unit } from '../model/index.ts';
-import { chainageOf, type Frame } from './frame.ts';
+import type { Frame } from './frame.ts';
 
 /** Even spans are preferred among equals: weight of the square of a span against the cost of the deck. */
 const EVEN = 1e-7;
@@ -89,9 +89,8 @@ export function supportCosts(
 ): SupportCosts {
   const growth = Math.cbrt(Math.max(mostM / leastM, 1.01));
   const knots = [0, 1, 2, 3].map((k) => leastM * growth ** k);
-  const { X } = frame;
   const C = knots.map((span) =>
-    Float64Array.from(X, (x) => table.support(form, chainageOf(frame, x), span, span)),
+    frame.chainageM.map((chainageM) => table.support(form, chainageM, span, span)),
   );
   return { knots, C };
 }

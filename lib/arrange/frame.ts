@@ -19,6 +19,8 @@ export interface Frame {
   readonly mirrored: boolean;
   /** Candidate positions, m, rising, both abutments included; none lies in a hard zone. */
   readonly X: Float64Array;
+  /** Chainage of every candidate position, m. */
+  readonly chainageM: Float64Array;
   /** 1 where a soft zone makes a support dearer. */
   readonly soft: Uint8Array;
   readonly barred: readonly Barred[];
@@ -78,32 +80,42 @@ function local(site: Site, mirrored: boolean, fromM: number, toM: number): Span 
   return mirrored ? [site.endM - toM, site.endM - fromM] : [fromM - site.startM, toM - site.startM];
 }
 
-function build(site: Site, pierHalfWidthM: number, mirrored: boolean): Frame {
-  const { startM, endM, lengthM } = site;
+/** Stretches barred to supports on a site, from one end of it. */
+export function barredOf(site: Site, pierHalfWidthM: number, mirrored = false): Barred[] {
   const widened = site.zones
     .filter(({ hard }) => hard)
     .map(({ fromM, toM, name }) => {
       const [a, b] = local(site, mirrored, fromM - pierHalfWidthM, toM + pierHalfWidthM);
       return { fromM: a, toM: b, name };
     })
-    .filter(({ fromM, toM }) => toM > SAME_M && fromM < lengthM - SAME_M);
-  const barred = joined(widened);
+    .filter(({ fromM, toM }) => toM > SAME_M && fromM < site.lengthM - SAME_M);
+  return joined(widened);
+}
+
+function build(site: Site, pierHalfWidthM: number, mirrored: boolean): Frame {
+  const { startM, endM, lengthM } = site;
+  const barred = barredOf(site, pierHalfWidthM, mirrored);
   const softZones = site.zones
     .filter(({ hard }) => !hard)
     .map(({ fromM, toM }) => local(site, mirrored, fromM, toM));
   const edges = [...barred.flatMap(({ fromM, toM }) => [fromM, toM]), ...softZones.flat()];
   const X = candidates(lengthM, barred, edges);
-  const soft = Uint8Array.from(X, (x) => (softZones.some((zone) => inside(x, zone)) ? 1 : 0));
+  const soft = new Uint8Array(X.length);
+  for (const zone of softZones) for (let i = 0; i < X.length; i += 1) if (inside(X[i]!, zone)) soft[i] = 1;
   const main = site.mainOpening;
   const [from, to] = main === null ? [0, 0] : local(site, mirrored, main.fromM, main.toM);
   const middle = (from + to) / 2;
   const opening =
     main === null ? null : (barred.find(({ fromM, toM }) => fromM < middle && toM > middle) ?? null);
-  return { startM, endM, lengthM, mirrored, X, soft, barred, opening };
+  const ends = { startM, endM, lengthM, mirrored };
+  return { ...ends, X, chainageM: X.map((x) => chainageOf(ends, x)), soft, barred, opening };
 }
 
 /** Chainage of a position, m, to the micrometre. */
-export function chainageOf(frame: Frame, x: number): number {
+export function chainageOf(
+  frame: Pick<Frame, 'startM' | 'endM' | 'lengthM' | 'mirrored'>,
+  x: number,
+): number {
   if (x === 0) return frame.mirrored ? frame.endM : frame.startM;
   if (x === frame.lengthM) return frame.mirrored ? frame.startM : frame.endM;
   return Math.round((frame.mirrored ? frame.endM - x : frame.startM + x) * 1e6) / 1e6;

@@ -15,6 +15,8 @@ interface Room {
   readonly V: Float64Array;
   readonly Y: Int32Array;
   readonly queue: Int32Array;
+  /** What it costs to begin one more span at each position. */
+  readonly reached: Float64Array;
 }
 
 export function roomFor(n: number, ends: number, most: number): Room {
@@ -27,6 +29,7 @@ export function roomFor(n: number, ends: number, most: number): Room {
     V: new Float64Array(n),
     Y: new Int32Array(n),
     queue: new Int32Array(n),
+    reached: new Float64Array(n),
   };
 }
 

@@ -96,10 +96,13 @@ interface Onto {
   cost: number;
 }
 
-/** The cheapest interior span from any of the positions low..high onto z, left in `onto`; gives back 0 where there is none. */
+/**
+ * The cheapest interior span from any of the positions low..high onto z, left in `onto`; gives back 0 where there is none.
+ * `reached` is what it costs to begin a span at each position, its support included.
+ */
 function cheapestOnto(
   layers: Layers,
-  F: Float64Array,
+  reached: Float64Array,
   low: number,
   high: number,
   z: number,
@@ -116,8 +119,8 @@ function cheapestOnto(
     const s = xz - X[y]!;
     const i = s | 0;
     const deck = cost[i]! + (s - i) * (cost[i + 1]! - cost[i]!);
-    const v = F[y]! + A[y]! + deck + (B[y]! + bz) * s;
-    if (v < best - SLACK * v) {
+    const v = reached[y]! + deck + (B[y]! + bz) * s;
+    if (v < best && v < best - SLACK * v) {
       best = v;
       from = y;
     }
@@ -182,6 +185,8 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
   const farthest = Math.min(j * G, X[lastEnd]! - limits.minSpacingM) + SLACK;
   const closes = X[firstEnd]! - G - SLACK;
   const onto: Onto = { from: -1, cost: Infinity };
+  const { reached } = layers.room;
+  for (let y = 0; y < n; y += 1) reached[y] = F[y]! + layers.half.A[y]!;
   next.fill(Infinity);
   let any = false;
   let low = 1;
@@ -193,7 +198,7 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
     while (X[high + 1]! <= xz - least) high += 1;
     const count =
       j > 2 && xz < closes
-        ? cheapestOnto(layers, F, low, high, z, onto)
+        ? cheapestOnto(layers, reached, low, high, z, onto)
         : listOnto(layers, j, F, low, high, z, onto);
     if (count === 0 || isTooDear(layers, onto.cost, xz)) continue;
     if (xz >= closes) closeFrom(layers, j + 1, z, count);
