@@ -16,6 +16,7 @@ import {
   studyShelf,
   studyStore,
   undoKeys,
+  whileDragged,
   type Journal,
   type Keeping,
   type StudyShelf,
@@ -78,6 +79,8 @@ async function start(): Promise<void> {
   // They load while the page looks for its study.
   const example = query.has('study') ? null : exampleNamed(query.get('example'));
   const workers = example === null ? appraiser() : answeredFirst(appraiser(), answerOf(example));
+  // The hand has both processors to itself.
+  whileDragged(workers.hold);
   const cupboard = await deviceCupboard().catch(() => null);
   const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
   const unsaved = journal(localStorage);

@@ -56,6 +56,8 @@ export interface HostPage {
   /** Where what is off the screen waits to be drawn. */
   readonly rests: Rests;
   readonly sight: Sight;
+  /** A cell has been drawn off the screen, where it is not laid out. */
+  readonly drawnUnseen: (element: HTMLElement) => void;
   /** The station this one waits for, if any. */
   readonly waitsFor: (station: string) => string | undefined;
   /** The state of a station, or the place of something, has changed. */
@@ -230,6 +232,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   const drawAndSay = (): void => {
     page.rests.drop(drawAndSay);
     draw();
+    if (!isNear && paper === null) page.drawnUnseen(element);
     late.set(isWaiting());
     saySoFar();
   };

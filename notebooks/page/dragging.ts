@@ -46,6 +46,20 @@ export function untilDragRests(signal: AbortSignal): Promise<void> {
   });
 }
 
+type Told = (isMoving: boolean) => void;
+const told = new Set<Told>();
+let resting: ReturnType<typeof setTimeout> | undefined;
+
+function moving(isMoving: boolean): void {
+  const was = resting !== undefined;
+  clearTimeout(resting);
+  resting = isMoving ? setTimeout(() => moving(false), REST_MS) : undefined;
+  if (was !== isMoving) for (const tell of told) tell(isMoving);
+}
+
+/** Tells when something dragged begins to move, and when it rests or has been released: the time between is the hand's. */
+export const whileDragged = (tell: Told): void => void told.add(tell);
+
 /**
  * Makes an element draggable with mouse or pen. The drag lives on the document, so that it goes on when a new drawing
  * takes the place of the element under the pointer. Touch is left to the browser, which scrolls with it, unless asked for.
@@ -68,12 +82,14 @@ export function draggable(
       if (waiting === null) return;
       const at = waiting;
       waiting = null;
+      if (isDragging()) moving(true);
       move(at);
     };
 
     const stop = (): void => {
       listening.abort();
       page.documentElement.classList.remove('dragging');
+      moving(false);
     };
     const onMove = ({ clientX, clientY, shiftKey, altKey }: PointerEvent): void => {
       const at = { dx: clientX - down.clientX, dy: clientY - down.clientY, shift: shiftKey, alt: altKey };

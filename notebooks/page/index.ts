@@ -19,7 +19,7 @@ export { choiceInput, type Choice, type ChoiceInput, type ChoiceSpec } from './c
 export { wordsInput, type WordsInput, type WordsSpec } from './wordsInput.ts';
 export { standing, type StandingSpec } from './standing.ts';
 export { pushed } from './pushed.ts';
-export { draggable, untilDragRests, type Drag, type DragAt } from './dragging.ts';
+export { draggable, untilDragRests, whileDragged, type Drag, type DragAt } from './dragging.ts';
 export { takeHold, type HandDesk } from './takeHold.ts';
 export { whereFrom, type Ask, type WhereFrom } from './whereFrom.ts';
 export { workedFigure } from './workedFigure.ts';

@@ -5,6 +5,7 @@ import type { CellHost, CellSpec, Explained } from './cellHost.ts';
 import { cellHost } from './cellHost.ts';
 import { exchange } from './exchange.ts';
 import { frames, screenFrames } from './frames.ts';
+import { heights, type Heights } from './heights.ts';
 import { lateness } from './lateness.ts';
 import { isDragging } from './dragging.ts';
 import { drawingActions } from './drawingFile.ts';
@@ -125,9 +126,12 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
   const stops: (() => void)[] = [];
   let sections: readonly LineSection[] = [];
   let known: readonly Station[] = [];
+  let sizes: Heights | undefined;
 
   const hosts = (): CellHost[] => sections.flatMap((section) => section.hosts);
-  const ties = () => tiesOf(known, (cell) => graph.uses(cell));
+  /** Found out once: stations and cells stay what they are. */
+  let tied: ReturnType<typeof tiesOf> | undefined;
+  const ties = () => (tied ??= tiesOf(known, (cell) => graph.uses(cell)));
   const lines = stationLines(element, () => sections, ties, queue);
 
   const isBusy = (): boolean =>
@@ -143,6 +147,7 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
     explain,
     rests,
     sight,
+    drawnUnseen: (cell: HTMLElement) => sizes?.changed(cell.closest<HTMLElement>('.section')!),
     homeOf: (cellName: string) => homeOf(cellName, known, (cell) => graph.uses(cell)),
     waitsFor(station: string) {
       const above = new Set(ties().get(station)?.uses);
@@ -218,6 +223,11 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
       for (const { element: cell } of hosts())
         cell.querySelector(':scope > .body')?.after(drawingActions(cell, heading));
       root.append(element);
+      sizes = heights(
+        sections.map((section) => section.element),
+        rests,
+      );
+      stops.push(sizes.end);
       for (const host of hosts()) {
         host.begin();
         stops.push(host.end);

@@ -16,7 +16,7 @@ const whenDrawn = (work: () => void): void => void setTimeout(work, AFTER_MS);
 /**
  * The same appraiser, which gives the answer that came with the pages to the first study it is asked, if that is the study
  * which the answer was worked out for. The workers work it out all the same: the next study is nearly always this one with
- * one thing changed.
+ * one thing changed. When that is asked they leave off: they remember what they have found.
  */
 export function answeredFirst(
   workers: Appraiser,
@@ -24,14 +24,19 @@ export function answeredFirst(
   later: (work: () => void) => void = whenDrawn,
 ): Appraiser {
   let isFirst = true;
+  const other = new AbortController();
   return {
     ...workers,
     async appraise(study, run) {
+      if (!isFirst) other.abort();
       const answer = isFirst ? await came.catch(() => null) : null;
       isFirst = false;
       run?.signal?.throwIfAborted();
       if (answer?.study.fingerprint !== fingerprint(study)) return workers.appraise(study, run);
-      later(() => void workers.appraise(study).catch(() => undefined));
+      later(() => {
+        const { signal } = other;
+        if (!signal.aborted) void workers.appraise(study, { signal }).catch(() => undefined);
+      });
       return answer;
     },
   };

@@ -14,6 +14,8 @@ export interface Appraiser {
     options: readonly Option[],
     run?: Partial<SlowRun>,
   ) => Promise<AppraisedOption[]>;
+  /** Holds what the workers are doing, or lets it go on. */
+  readonly hold: (isHeld: boolean) => void;
   /** Ends the workers; what they were working on rejects. */
   readonly end: () => void;
 }
@@ -104,6 +106,9 @@ export function appraiser(): Appraiser {
       const done = await Promise.all(shares);
       const outcomes = options.map((_, i) => done[i % started.length]![Math.floor(i / started.length)]!);
       return outcomes.flatMap((outcome) => ('totals' in outcome ? [outcome.option] : []));
+    },
+    hold(isHeld) {
+      for (const { line } of started) line.hold(isHeld);
     },
     end() {
       for (const { worker, line } of started) {

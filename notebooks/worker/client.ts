@@ -18,6 +18,8 @@ export interface Client<J extends Jobs> {
     arg: ArgOf<J[K]>,
     run?: Partial<SlowRun>,
   ) => Promise<ResultOf<J[K]>>;
+  /** Holds all work before its next slice, or lets it go on; it can be given up all the same. */
+  readonly hold: (isHeld: boolean) => void;
   /** Rejects with `error` everything still waiting and everything asked from now on: the worker has died or was ended. */
   readonly close: (error: Error) => void;
 }
@@ -55,6 +57,7 @@ export function client<J extends Jobs>(line: Line): Client<J> {
 
   return {
     call: call as Client<J>['call'],
+    hold: (isHeld) => line.postMessage({ hold: isHeld }),
     close: (error) => {
       closed ??= error;
       for (const { reject } of waiting.values()) reject(error);

@@ -8,10 +8,11 @@ export type Jobs = Readonly<Record<string, (arg: never) => Steps<unknown>>>;
 export type ArgOf<J> = J extends (arg: infer A) => Steps<unknown> ? A : never;
 export type ResultOf<J> = J extends (arg: never) => Steps<infer T> ? T : never;
 
-/** What the page says: start a piece of work under a new number, or give the one of that number up. */
+/** What the page says: start a piece of work under a new number, give the one of that number up, hold all or go on. */
 export type Wish =
   | { readonly id: number; readonly job: string; readonly arg: unknown }
-  | { readonly id: number; readonly abort: true };
+  | { readonly id: number; readonly abort: true }
+  | { readonly hold: boolean };
 
 /** What the worker says about the work of that number; nothing more once it has been given up. */
 export type Answer =

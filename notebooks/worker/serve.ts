@@ -16,6 +16,18 @@ interface Serving extends Pick<Slicing, 'now' | 'budgetMs' | 'breathe'> {
  */
 export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: Serving): void {
   const live = new Map<number, AbortController>();
+  let isHeld = false;
+  let held: (() => void)[] = [];
+  const goOn = (): void => {
+    const waiting = held;
+    held = [];
+    for (const resolve of waiting) resolve();
+  };
+  /** Lets messages through, and waits while all work is held. */
+  const breathe = async (signal: AbortSignal): Promise<void> => {
+    await slicing.breathe();
+    while (isHeld && !signal.aborted) await new Promise<void>((resolve) => held.push(resolve));
+  };
   const say = (answer: Answer, transfer: Transferable[] = []): void => line.postMessage(answer, { transfer });
 
   const work = async (id: number, job: string, arg: unknown): Promise<void> => {
@@ -32,7 +44,12 @@ export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: S
         toldAt = now;
         say({ id, progress });
       };
-      const value = await sliced(start(arg as never), { ...slicing, signal, report });
+      const value = await sliced(start(arg as never), {
+        ...slicing,
+        breathe: () => breathe(signal),
+        signal,
+        report,
+      });
       say({ id, value }, transferables(value));
     } catch (error) {
       if (!signal.aborted) sayError(id, error);
@@ -54,7 +71,9 @@ export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: S
   };
 
   line.addEventListener('message', ({ data }: { data: Wish }) => {
-    if ('abort' in data) live.get(data.id)?.abort();
+    if ('hold' in data) isHeld = data.hold;
+    else if ('abort' in data) live.get(data.id)?.abort();
     else void work(data.id, data.job, data.arg);
+    goOn();
   });
 }

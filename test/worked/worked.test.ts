@@ -13,15 +13,22 @@ const study = askedOf({
 const answer = appraise(study);
 
 /** Workers that write down what they are asked and answer with another appraisal. */
-function workers(): Appraiser & { readonly asked: Study[] } {
+function workers(): Appraiser & {
+  readonly asked: Study[];
+  readonly given: (AbortSignal | undefined)[];
+} {
   const asked: Study[] = [];
+  const given: (AbortSignal | undefined)[] = [];
   return {
     asked,
-    appraise(one) {
+    given,
+    appraise(one, run) {
       asked.push(one);
+      given.push(run?.signal);
       return Promise.resolve({ ...answer, currency: 'worked out' });
     },
     workOut: () => Promise.resolve([]),
+    hold: () => undefined,
     end: () => undefined,
   };
 }
@@ -59,6 +66,15 @@ describe('answeredFirst(workers, answer)', () => {
       'EUR',
       'worked out',
     ]);
+  });
+  it('lets the workers leave off what was shown already once they are asked something else', async () => {
+    const behind = workers();
+    const first = answeredFirst(behind, Promise.resolve(answer), at);
+    await first.appraise(study);
+    expect(behind.given[0]?.aborted).toBe(false);
+    await first.appraise(changed);
+    expect(behind.given[0]?.aborted).toBe(true);
+    expect(behind.given[1]).toBeUndefined();
   });
   it('asks the workers where no answer came', async () => {
     expect(await currencies(answeredFirst(workers(), Promise.resolve(null)), study)).toEqual(['worked out']);

@@ -107,6 +107,31 @@ describe('client and serve', () => {
     expect(log.steps).toEqual([]);
   });
 
+  it('hold(true) holds all work before its next slice, hold(false) lets it go on', async () => {
+    const promise = page.call('count', { name: 'a', to: 30 });
+    await turnOfTheLoop();
+    page.hold(true);
+    await quiet();
+    const { length } = log.steps;
+    expect(length).toBeLessThan(30);
+    await quiet();
+    expect(log.steps).toHaveLength(length);
+    page.hold(false);
+    expect(await promise).toBe(30);
+  });
+
+  it('call(job, arg, {signal}) is given up while it is held', async () => {
+    const controller = new AbortController();
+    page.hold(true);
+    const promise = page.call('count', { name: 'a', to: 30 }, { signal: controller.signal });
+    await quiet();
+    controller.abort();
+    await expect(promise).rejects.toMatchObject({ name: 'AbortError' });
+    page.hold(false);
+    await quiet();
+    expect(log.steps).toEqual([]);
+  });
+
   it('two calls are worked on by turns', async () => {
     const both = [page.call('count', { name: 'a', to: 20 }), page.call('count', { name: 'b', to: 20 })];
     expect(await Promise.all(both)).toEqual([20, 20]);
