@@ -11,7 +11,7 @@ import type {
 } from '../model/index.ts';
 import { planProgramme } from '../programme/index.ts';
 import { constructionDepth, groundAt, headroomSpare, roadLevelAt, type DepthAlong } from '../site/index.ts';
-import { expectedLines, placeText, standOneSupport, standSupports } from '../substructure/index.ts';
+import { foundationsCost, placeText, standOneSupport, standSupports } from '../substructure/index.ts';
 import { measure } from '../takeoff/index.ts';
 import { remembered } from '../kept.ts';
 import type { DepthTrial } from './leastCostDepth.ts';
@@ -155,11 +155,11 @@ export function depthsOf(bench: Workbench, option: Option, depthM: number): numb
 export function trialAt(bench: Workbench, option: Option, depthM: number): DepthTrial {
   const { site, costOf } = bench;
   const { designs, profile, supports, lines } = atDepths(bench, option, depthsOf(bench, option, depthM));
-  const foundations = supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
+  const foundations = supports.reduce((sum, support) => sum + foundationsCost(support, costOf), 0);
   const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
   const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
   return {
-    cost: costOf(lines) + costOf(foundations),
+    cost: costOf(lines) + foundations,
     // A depth that fouls a clearance fits no better than one that is too weak.
     utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation,
   };

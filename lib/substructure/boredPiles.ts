@@ -97,24 +97,29 @@ export function boredPiles(
 ): PileGroup | null {
   const { backfill } = task;
   if (backfill === null) return leastGroup(task, ground, levels, reach)?.group ?? null;
-  const tried = substructureData.abutment.pileHeelShares.map((heelShare) =>
-    leastGroup({ ...task, backfill: { ...backfill, heelShare } }, ground, levels, reach),
-  );
-  return (
-    tried.reduce((a, b) => (a === null || (b !== null && b.effort < a.effort) ? b : a), null)?.group ?? null
-  );
+  let best = null as Group | null;
+  for (const heelShare of substructureData.abutment.pileHeelShares) {
+    const over = { ...task, backfill: { ...backfill, heelShare } };
+    best = leastGroup(over, ground, levels, reach, best?.effort) ?? best;
+  }
+  return best?.group ?? null;
 }
 
-/** The group with the least effort: concrete of piles and cap, and a fixed amount for each pile, m3. */
+interface Group {
+  readonly group: PileGroup;
+  readonly effort: number;
+}
+
+/** The group with the least effort, below `least`: concrete of piles and cap, and a fixed amount for each pile, m3. */
 function leastGroup(
   task: FootTask,
   ground: GroundFigures,
   levels: PileLevels,
   reach: number,
-): { readonly group: PileGroup; readonly effort: number } | null {
+  least = Infinity,
+): Group | null {
   const { piles } = substructureData;
   let best: PileGroup | null = null;
-  let least = Infinity;
   const wall = task.backfill !== null;
   // What the group has to carry before its own weight: groups below it are not worked out.
   const stress = piles.concreteMPa * 1000;

@@ -5,4 +5,4 @@ export { placeText } from './placeText.ts';
 export { standOneSupport } from './standOneSupport.ts';
 export type { SupportAsk } from './supportAsk.ts';
 export { standSupports } from './standSupports.ts';
-export { expectedLines } from './supportLines.ts';
+export { expectedLines, foundationsCost } from './supportLines.ts';

@@ -12,7 +12,7 @@ import type { SupportAsk } from './supportAsk.ts';
 import {
   articulationLines,
   articulationOf,
-  expectedLines,
+  foundationsCost,
   upliftKN,
   waterAccessLines,
 } from './supportLines.ts';
@@ -31,7 +31,7 @@ export function standAbutment(
   const setting = settingAt(site, ask.chainageM);
   const stood = wallsThatFit(site, ask, setting).map((wall) => standOn(site, ask, setting, wall));
   // Of equals the plainer one, which comes first.
-  const costs = stood.map((support) => costOf(expectedLines(support)));
+  const costs = stood.map((support) => costOf(support.lines) + foundationsCost(support, costOf));
   return stood[costs.indexOf(Math.min(...costs))]!;
 }
 

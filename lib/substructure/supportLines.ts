@@ -120,6 +120,17 @@ export function expectedLines(support: Support): MeasuredLine[] {
   ];
 }
 
+/**
+ * Money of the foundations of a support, weighed by the odds of the ground: that of their lines in `expectedLines`, without
+ * writing them out. `costOf` is in proportion to quantities.
+ */
+export function foundationsCost(
+  { foundations }: Pick<Support, 'foundations'>,
+  costOf: (lines: readonly MeasuredLine[]) => number,
+): number {
+  return foundations.reduce((sum, { odds, lines }) => sum + odds * costOf(lines), 0);
+}
+
 /** One measured line of a support, with the support's index where it has one. */
 export function line(
   ask: Pick<SupportAsk, 'index'>,

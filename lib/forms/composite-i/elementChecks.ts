@@ -78,7 +78,12 @@ export function elementChecks(
   const fyBottom = model.yieldMPa(tb);
   const { steel: gammaM0, steelBuckling: gammaM1 } = model.standard.resistance;
   const top = model.cracked[e]!;
-  Object.assign(here, plates);
+  here.heightM = plates.heightM;
+  here.topWidthM = plates.topWidthM;
+  here.topM = plates.topM;
+  here.bottomWidthM = plates.bottomWidthM;
+  here.bottomM = plates.bottomM;
+  here.webM = plates.webM;
   stageFigures(model, e);
   const bracingM = model.bracingM[e]!;
   const favourable = model.standard.factors.uls.permanentFavourable / model.standard.factors.uls.permanent;
@@ -195,7 +200,7 @@ function strutReduction(
   fyMPa: number,
 ): number {
   const area = widthM * thicknessM + (webM * Math.max(0, compressedM)) / 3;
-  const gyration = Math.sqrt((thicknessM * widthM ** 3) / 12 / area);
+  const gyration = Math.sqrt((thicknessM * widthM * widthM * widthM) / 12 / area);
   return columnReduction(columnSlenderness(bracingM, gyration, fyMPa), 'd');
 }
 

@@ -48,10 +48,7 @@ export function girderEffects(
   const shortBeam = stageBeam(model, run, model.short);
 
   const elements = model.elementM.length;
-  const kgM = Float64Array.from(
-    { length: elements },
-    (_, e) => materials.steelDensityKgM3 * steelArea(platesAt(run, e)),
-  );
+  const kgM = model.elementM.map((_, e) => materials.steelDensityKgM3 * steelArea(platesAt(run, e)));
   const steelKg = kgM.reduce((sum, kg, e) => sum + (kg + secondaryKgM) * model.elementM[e]!, 0);
   const loadKNm = new Float64Array(elements + 1);
   for (let i = 0; i <= elements; i++) {
@@ -77,7 +74,7 @@ const figures: GirderFigures = { areaM2: 0, centroidM: 0, inertiaM4: 0 };
 
 /** Beam with the stiffness of one stage; no tops = bare steel. */
 function stageBeam(model: GirderModel, run: PlateRun, tops: readonly GirderTop[] | undefined): LineBeam {
-  const ei = Float64Array.from(model.elementM, (_, e) => {
+  const ei = model.elementM.map((_, e) => {
     const top = tops ? (model.isCracked[e] === 1 ? model.cracked[e]! : tops[e]!) : undefined;
     return model.modulusKNm2 * girderFigures(figures, platesAt(run, e), top).inertiaM4;
   });

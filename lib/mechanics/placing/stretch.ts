@@ -45,6 +45,11 @@ export function stretchOf(xM: ArrayLike<number>, Q: Float64Array, T: Float64Arra
 /** Writes the element line of a section. */
 export function sectionLine({ stretch, station, arm, turn }: StretchSection, line: Float64Array): void {
   const { left, right } = stretch;
+  if (arm === 1 && turn === 0) {
+    line.set(right.Q);
+    line.set(left.Q.subarray(0, 4 * station));
+    return;
+  }
   combine(line, left.Q, left.T, arm, turn, 0, 4 * station);
   combine(line, right.Q, right.T, arm, turn, 4 * station, line.length);
 }

@@ -1,5 +1,5 @@
 import { outlineSums, type SectionPoint } from './polygonProperties.ts';
-import { partSums, type SectionPart } from './sectionProperties.ts';
+import { partSums, type PartSums, type SectionPart } from './sectionProperties.ts';
 
 /** A part with its design strength; `tensionMPa` 0 for concrete that cracks. */
 export type PlasticPart = SectionPart & {
@@ -25,8 +25,8 @@ export function plasticMoment(
 ): PlasticMoment {
   let low = Infinity;
   let high = -Infinity;
-  for (const part of parts) {
-    const sums = partSums(part);
+  const wholes = parts.map((part) => partSums(part));
+  for (const sums of wholes) {
     low = Math.min(low, sums.bottom);
     high = Math.max(high, sums.top);
   }
@@ -36,34 +36,60 @@ export function plasticMoment(
   // The resultant changes steadily with the axis: halve the interval until the axis is found to 1e-9 of the depth.
   for (let i = 0; i < 60; i++) {
     const axis = (low + high) / 2;
-    const net = resultant(parts, axis, bends).forceMN;
+    const net = forceMN(parts, wholes, axis, bends);
     // Compression positive: in sagging too much of it means the axis lies too low.
     if (bends === 'sagging' ? net > 0 : net < 0) low = axis;
     else high = axis;
     if (high - low < 1e-10 * (highest - lowest)) break;
   }
   const axisM = (low + high) / 2;
-  const momentKNm = 1000 * Math.abs(resultant(parts, axisM, bends).momentMNm);
+  const momentKNm = 1000 * Math.abs(momentMNm(parts, wholes, axisM, bends));
   if (!(momentKNm > 0)) throw new RangeError('section: expected parts with strength, received none');
   return { momentKNm, axisM };
 }
 
-/** Force, compression positive, and moment about the axis of the fully plastic section. */
-function resultant(parts: readonly PlasticPart[], axis: number, bends: 'sagging' | 'hogging') {
-  let forceMN = 0;
-  let momentMNm = 0;
-  for (const part of parts) {
-    const whole = partSums(part);
+/** Force of the fully plastic section, compression positive; `wholes` are the sums of its parts. */
+function forceMN(
+  parts: readonly PlasticPart[],
+  wholes: readonly PartSums[],
+  axis: number,
+  bends: 'sagging' | 'hogging',
+): number {
+  let force = 0;
+  for (let i = 0; i < parts.length; i++) {
+    const part = parts[i]!;
+    const above = areaAbove(part, axis);
+    const below = wholes[i]!.area - above;
+    const tension = part.tensionMPa ?? part.fyMPa;
+    force +=
+      bends === 'sagging' ? part.fyMPa * above - tension * below : part.fyMPa * below - tension * above;
+  }
+  return force;
+}
+
+/** Its moment about the axis. */
+function momentMNm(
+  parts: readonly PlasticPart[],
+  wholes: readonly PartSums[],
+  axis: number,
+  bends: 'sagging' | 'hogging',
+): number {
+  let moment = 0;
+  parts.forEach((part, i) => {
     const above = sumsAbove(part, axis);
-    const below = { area: whole.area - above.area, first: whole.first - above.first };
+    const below = { area: wholes[i]!.area - above.area, first: wholes[i]!.first - above.first };
     const [squeezed, stretched] = bends === 'sagging' ? [above, below] : [below, above];
     const tension = part.tensionMPa ?? part.fyMPa;
-    forceMN += part.fyMPa * squeezed.area - tension * stretched.area;
-    momentMNm +=
+    moment +=
       part.fyMPa * (squeezed.first - axis * squeezed.area) -
       tension * (stretched.first - axis * stretched.area);
-  }
-  return { forceMN, momentMNm };
+  });
+  return moment;
+}
+
+function areaAbove(part: SectionPart, axis: number): number {
+  if (part.kind !== 'rect') return sumsAbove(part, axis).area;
+  return part.widthM * Math.min(part.heightM, Math.max(0, part.bottomM + part.heightM - axis));
 }
 
 function sumsAbove(part: SectionPart, axis: number): { area: number; first: number } {
