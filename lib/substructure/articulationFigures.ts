@@ -1,6 +1,7 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { deckMaterial } from './deckMaterial.ts';
-import { depthPathAt, fixedIn, unitsAt, type UnitAt } from './meetings.ts';
+import { forceAlong, holdingForce, stillAt } from './heldAlong.ts';
+import { depthPathAt, heldIn, onGround, unitsAt, type UnitAt } from './meetings.ts';
 import { supportName } from './supportFigures.ts';
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
@@ -17,8 +18,24 @@ const spansBeside = (at: At, { s, path, unit }: UnitAt): string[] =>
     .filter((i) => i >= 0 && i < at.option.designs[unit]!.task.spansM.length)
     .map((i) => `${path}/task/spansM/${i}`);
 
-/** The units that hold this support still, and those that slide on it. */
-const holding = (at: At): UnitAt[] => unitsAt(at).filter(({ unit, s }) => fixedIn(at, unit) === s);
+/** The units that this support holds along the road, alone or with others. */
+const holding = (at: At): UnitAt[] =>
+  unitsAt(at).filter(({ unit, s }) => heldIn(at, unit).stiffnessKNm[s]! > 0);
+
+/** Whether more than one support of a unit holds it. */
+const isShared = (at: At, unit: number): boolean =>
+  heldIn(at, unit).stiffnessKNm.filter((k) => k > 0).length > 1;
+
+/** Path of the chainage that stays where it is when a unit grows or shrinks. */
+const stillPath = (at: At, unit: number): string => {
+  const alone = heldIn(at, unit).stiffnessKNm.findIndex((k) => k > 0);
+  return isShared(at, unit)
+    ? `${at.root}/held/${unit}/stillM`
+    : `${at.root}/units/${unit}/supportsM/${alone}`;
+};
+
+const stiffnesses = (at: At, unit: number): string[] =>
+  heldIn(at, unit).stiffnessKNm.flatMap((k, s) => (k > 0 ? [`${at.root}/held/${unit}/stiffness/${s}`] : []));
 
 const permanents = (at: At, { unit, path }: UnitAt, keep: (s: number) => boolean): string[] =>
   at.option.units[unit]!.supportsM.flatMap((_, s) => (keep(s) ? [`${path}/reactions/${s}/permanentKN`] : []));
@@ -41,7 +58,7 @@ const movementFigures = (at: At) => {
   const units = unitsAt(at);
   return {
     here: `${at.foot}/chainageM`,
-    fixed: units.map(({ unit }) => `${at.root}/units/${unit}/supportsM/${fixedIn(at, unit)}`),
+    fixed: units.map(({ unit }) => stillPath(at, unit)),
     figures: units.flatMap(({ unit }) =>
       ['expansionPerK', 'rangeK', 'shorteningPerM'].map(
         (name) => `data/substructure/movement/${deckMaterial(at.option.designs[unit]!)}/${name}`,
@@ -70,7 +87,8 @@ export const articulationFigures: readonly Descriptor[] = [
     label: on('holds the deck along the road'),
     unit: '',
     method: 'choice',
-    formula: 'support nearest the middle of the unit; of equals the lower, then the one in shallower water',
+    formula:
+      'support nearest the middle of the unit, of equals the lower, then the one in shallower water; with it those beside it, or none where rubber on all of them holds the deck, that leave smaller moments at the feet of the piers',
     inputs: (at) => ({
       all: unitsAt(at).flatMap(({ unit }) =>
         at.option.units[unit]!.supportsM.map((_, s) => `${at.root}/units/${unit}/supportsM/${s}`),
@@ -173,6 +191,46 @@ export const articulationFigures: readonly Descriptor[] = [
       gammaQ: factor('traffic'),
     }),
     compute: (v) => Math.max(0, v.gammaG * v.permanent + v.gammaQ * v.traffic) / 1000,
+  }),
+  described({
+    path: support('articulation/alongKN'),
+    when: (at) => unitsAt(at).length === 1 && holding(at).some(({ unit }) => isShared(at, unit)),
+    label: on('force along the road'),
+    unit: 'kN',
+    method: 'shared by stiffness',
+    formula:
+      'braking and friction of the unit x stiffness here / that of all that hold it, + stiffness x half of 1000 x (expansion x range of temperature + shortening) x distance to the point that stays',
+    inputs: (at) => {
+      const [{ unit, s }] = holding(at) as [UnitAt];
+      const of = (name: string): string =>
+        `data/substructure/movement/${deckMaterial(at.option.designs[unit]!)}/${name}`;
+      return {
+        force: `${at.root}/held/${unit}/forceKN`,
+        own: `${at.root}/held/${unit}/stiffness/${s}`,
+        all: stiffnesses(at, unit),
+        here: `${at.foot}/chainageM`,
+        still: stillPath(at, unit),
+        expansion: of('expansionPerK'),
+        range: of('rangeK'),
+        shortening: of('shorteningPerM'),
+      };
+    },
+    compute: (v) =>
+      holdingForce(
+        v.force,
+        v.own,
+        sum(v.all),
+        (v.expansion * v.range + v.shortening) * Math.abs(v.here - v.still) * 1000,
+      ),
+  }),
+  described({
+    path: support('articulation/alongKN'),
+    when: (at) => holding(at).some(({ unit }) => isShared(at, unit)),
+    label: on('force along the road'),
+    unit: 'kN',
+    method: 'shared by stiffness',
+    formula: 'of the units that meet here: what their fixed points take together, or the greater on rubber',
+    inputs: (at) => ({ forces: holding(at).map(({ unit }) => `${at.root}/held/${unit}/forceKN`) }),
   }),
   described({
     path: support('articulation/alongKN'),
@@ -300,7 +358,7 @@ export const articulationFigures: readonly Descriptor[] = [
         );
       return {
         here: `${at.foot}/chainageM`,
-        fixed: units.map(({ unit }) => `${at.root}/units/${unit}/supportsM/${fixedIn(at, unit)}`),
+        fixed: units.map(({ unit }) => stillPath(at, unit)),
         expansion: movement('expansionPerK'),
         range: movement('rangeK'),
         shortening: movement('shorteningPerM'),
@@ -339,5 +397,87 @@ export const articulationFigures: readonly Descriptor[] = [
         0,
         -((v.permanent >= 0 ? v.favourable : v.gammaG) * v.permanent + v.gammaQ * Math.min(0, v.traffic)),
       ),
+  }),
+  described({
+    path: 'options/:option/held/:unit/forceKN',
+    label: (at) => `braking and unbalanced friction of unit ${at.index('unit') + 1}`,
+    unit: 'kN',
+    method: 'braking and friction',
+    formula:
+      'braking of the unit + unbalanced friction of its supports that slide: mu (1 + a) / 2 on the heavier side less mu (1 - a) / 2 on the lighter',
+    value: (at) => forceAlong(onGround(at, at.index('unit')), heldIn(at, at.index('unit'))),
+    inputs: (at) => {
+      const unit = at.index('unit');
+      const { standard } = at.site;
+      const names =
+        standard === 'lm1'
+          ? ['baseKN', 'perMKN', 'capKN']
+          : ['truckShare', 'trainShare', 'truckKN', 'laneKNm'];
+      return {
+        spans: at.design.task.spansM.map((_, i) => `${at.unit}/task/spansM/${i}`),
+        braking: names.map((name) => `data/substructure/braking/${standard}/${name}`),
+        lanes: 'site/deck/lanes',
+        sliding: permanents(at, { unit, s: 0, path: at.unit }, (s) => heldIn(at, unit).stiffnessKNm[s] === 0),
+        line: 'data/substructure/bearings/perLine',
+        mu: 'data/substructure/friction/coefficient',
+      };
+    },
+    sources: (at) => [
+      at.site.standard === 'lm1'
+        ? 'EN 1991-2 4.4.1, EN 1337-1 6.2 (from memory)'
+        : 'AASHTO LRFD 3.6.4, EN 1337-1 6.2 (from memory)',
+    ],
+  }),
+  described({
+    path: 'options/:option/held/:unit/stillM',
+    label: (at) => `point of unit ${at.index('unit') + 1} that stays when the deck grows or shrinks`,
+    unit: 'm',
+    method: 'centre of stiffness',
+    formula: 'sum of chainage x stiffness / sum of stiffness, of the supports that hold the unit',
+    value: (at) => heldIn(at, at.index('unit')).stillM,
+    inputs: (at) => {
+      const unit = at.index('unit');
+      return {
+        places: heldIn(at, unit).stiffnessKNm.flatMap((k, s) =>
+          k > 0 ? [`${at.root}/units/${unit}/supportsM/${s}`] : [],
+        ),
+        stiffness: stiffnesses(at, unit),
+      };
+    },
+    compute: ({ places, stiffness }) => stillAt(places, stiffness),
+  }),
+  described({
+    path: 'options/:option/held/:unit/stiffness/:s',
+    label: (at) => `stiffness along the road of support ${at.index('s') + 1} of unit ${at.index('unit') + 1}`,
+    unit: 'kN/m',
+    method: 'cantilever and rubber',
+    formula: (at) =>
+      heldIn(at, at.index('unit')).afloat
+        ? '1 / (h^3 / 3 E I + height of the rubber / G A): its area by the load, its height by the movement; an abutment is rigid'
+        : '3 E I / h^3, h from the foundation to the bearings: the shaft that its slenderness asks for, with what cracks and creep leave of its stiffness; rigid foundation',
+    value: (at) => heldIn(at, at.index('unit')).stiffnessKNm[at.index('s')]!,
+    inputs: (at) => {
+      const { afloat } = heldIn(at, at.index('unit'));
+      const bearings = (...names: string[]): string[] =>
+        names.map((name) => `data/substructure/bearings/${name}`);
+      const support = at.option.supports.findIndex(
+        ({ chainageM }) => chainageM === at.option.units[at.index('unit')]!.supportsM[at.index('s')],
+      );
+      return {
+        level: `${at.root}/supports/${support}/topLevelM`,
+        ground: `${at.root}/supports/${support}/groundLevelM`,
+        width: 'site/deck/widthM',
+        modulus: 'data/substructure/concrete/modulusMPa',
+        share: 'data/substructure/concrete/crackedShare',
+        slenderness: 'data/substructure/pier/slenderness',
+        load: afloat
+          ? [
+              `${at.unit}/reactions/${at.name('s')}/permanentKN`,
+              `${at.unit}/reactions/${at.name('s')}/trafficMaxKN`,
+            ]
+          : [],
+        rubber: afloat ? bearings('rubberShearMPa', 'rubberPressureMPa', 'leastRubberM', 'rubberStrain') : [],
+      };
+    },
   }),
 ];

@@ -23,7 +23,7 @@ const ground = z.strictObject({
 
 const schema = z.strictObject({
   about: z.string(),
-  concrete: figures('fckMPa', 'fcdMPa', 'fydMPa', 'weightKNm3'),
+  concrete: figures('fckMPa', 'fcdMPa', 'fydMPa', 'weightKNm3', 'modulusMPa', 'crackedShare'),
   factors: figures('permanent', 'traffic', 'wind', 'windWithTraffic', 'favourable'),
   braking: z.strictObject({
     lm1: figures('baseKN', 'perMKN', 'capKN'),
@@ -37,7 +37,18 @@ const schema = z.strictObject({
     reinforced: movement,
     jointGroupMm: figure,
   }),
-  bearings: figures('perLine', 'heightM', 'rubberStrain', 'mostRubberM', 'mostElastomericMN', 'tieDownShare'),
+  bearings: figures(
+    'perLine',
+    'heightM',
+    'rubberStrain',
+    'brakingStrain',
+    'leastRubberM',
+    'mostRubberM',
+    'rubberShearMPa',
+    'rubberPressureMPa',
+    'mostElastomericMN',
+    'tieDownShare',
+  ),
   seismic: figures(
     'amplification',
     'behaviour',

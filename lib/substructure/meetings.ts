@@ -1,7 +1,8 @@
 import type { At } from '../model/index.ts';
 import { groundAt, roadLevelAt, waterDepthAt } from '../site/index.ts';
-import { depthOver } from './articulate.ts';
-import { fixedSupport } from './fixedSupport.ts';
+import { depthOver } from './depthOver.ts';
+import { heldAlong, type HeldAlong, type UnitOnGround } from './heldAlong.ts';
+import { integralEnds } from './integralEnds.ts';
 
 /** A unit as it meets a support: its place among the units, and which of its supports this is. */
 export interface UnitAt {
@@ -29,13 +30,19 @@ export function depthPathAt(at: At, { unit, s, path }: UnitAt): string | null {
   return found === undefined ? null : `${path}/depthM/${found}`;
 }
 
-/** Which of its supports holds a unit along the road. */
-export function fixedIn(at: At, unit: number): number {
-  const { site } = at;
-  const { supportsM } = at.option.units[unit]!;
-  return fixedSupport(
-    supportsM,
-    supportsM.map((x) => roadLevelAt(at.option.profile, x) - groundAt(site, x)),
-    supportsM.map((x) => waterDepthAt(site, x)),
-  );
+/** A unit with what its supports stand on, as its horizontal system is worked out from. */
+export function onGround(at: At, unit: number): UnitOnGround {
+  const { site, option } = at;
+  const { supportsM } = option.units[unit]!;
+  return {
+    site,
+    unit: option.units[unit]!,
+    design: option.designs[unit]!,
+    heightM: supportsM.map((x) => roadLevelAt(option.profile, x) - groundAt(site, x)),
+    waterDepthM: supportsM.map((x) => waterDepthAt(site, x)),
+  };
 }
+
+/** How a unit is held along the road. */
+export const heldIn = (at: At, unit: number): HeldAlong =>
+  heldAlong(onGround(at, unit), integralEnds(at.site, at.option.units, at.option.designs));

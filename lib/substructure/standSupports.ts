@@ -2,8 +2,9 @@ import type { Design, RoadProfile, Site, Support, Unit } from '../model/index.ts
 import { constructionDepth } from '../site/constructionDepth.ts';
 import { groundAt, roadLevelAt, waterDepthAt } from '../site/index.ts';
 import type { Hold } from './articulate.ts';
-import { articulate, depthOver } from './articulate.ts';
+import { articulate } from './articulate.ts';
 import { substructureData } from './data.ts';
+import { depthOver } from './depthOver.ts';
 import { integralEnds } from './integralEnds.ts';
 import { pylonFoot } from './pylonFoot.ts';
 
@@ -36,6 +37,7 @@ export function standSupports(
       `designs: expected one for each of ${units.length} units, received ${designs.length}`,
     );
   }
+  const castIn = integralEnds(site, units, designs);
   const meetings = new Map<number, Meeting[]>();
   units.forEach((unit, k) => {
     const design = designs[k]!;
@@ -47,14 +49,14 @@ export function standSupports(
     }
     const height = x.map((c) => roadLevelAt(profile, c) - groundAt(site, c));
     const water = x.map((c) => waterDepthAt(site, c));
-    articulate(site, unit, design, height, water).forEach((hold, at) => {
+    const on = { site, unit, design, heightM: height, waterDepthM: water };
+    articulate(on, castIn).forEach((hold, at) => {
       const list = meetings.get(x[at]!) ?? [];
       list.push({ design, at, hold });
       meetings.set(x[at]!, list);
     });
   });
   const chainages = [...meetings.keys()].sort((a, b) => a - b);
-  const castIn = integralEnds(site, units, designs);
   return chainages.map((chainageM, index) => {
     const end = index === 0 || index === chainages.length - 1;
     const ask = askAt(site, profile, chainageM, index, end, meetings.get(chainageM)!);
@@ -129,7 +131,7 @@ function askAt(
         : Math.max(...meetings.map(({ hold }) => hold.alongKN)),
     acrossKN: meetings.reduce((sum, { hold }) => sum + hold.acrossKN, 0),
     fixed: integral !== undefined || fixed.length > 0,
-    heldAlongKN: fixed.reduce((sum, { hold }) => sum + hold.heldKN, 0),
+    heldAlongKN: meetings.reduce((sum, { hold }) => sum + hold.heldKN, 0),
     bearingMovementMm: integral ? 0 : Math.max(...meetings.map(({ hold }) => hold.movementMm)),
     bearings: integral ? 0 : meetings.length * substructureData.bearings.perLine,
     jointMovementMm: joint ? meetings.reduce((sum, { hold }) => sum + hold.movementMm, 0) : 0,

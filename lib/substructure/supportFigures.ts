@@ -1,6 +1,6 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { levelOnRoad, onRoad, onRoadFormula } from '../site/onRoad.ts';
-import { depthOver } from './articulate.ts';
+import { depthOver } from './depthOver.ts';
 import { depthPathAt, unitsAt } from './meetings.ts';
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
