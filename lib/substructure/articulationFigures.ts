@@ -88,7 +88,7 @@ export const articulationFigures: readonly Descriptor[] = [
     unit: '',
     method: 'choice',
     formula:
-      'support nearest the middle of the unit, of equals the lower, then the one in shallower water; with it those beside it, or none where rubber on all of them holds the deck, that leave smaller moments at the feet of the piers',
+      'support nearest the middle of the unit, of equals the lower, then the one in shallower water; with it those beside it, or none where rubber on all of them holds the deck, that leave smaller moments at the feet of the piers, the worst of them counted twice',
     inputs: (at) => ({
       all: unitsAt(at).flatMap(({ unit }) =>
         at.option.units[unit]!.supportsM.map((_, s) => `${at.root}/units/${unit}/supportsM/${s}`),

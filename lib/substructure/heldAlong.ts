@@ -30,7 +30,7 @@ export interface UnitOnGround {
 
 /** Most piers that hold one unit together. Common practice, no source. */
 const MOST_PIERS = 4;
-/** Holding it by more than one has to spare this share of the moments at the feet of its piers. */
+/** Holding it by more than one has to spare this share of what the piers are dear by. Common practice, no source. */
 const PAYS = 0.05;
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
@@ -128,10 +128,10 @@ function afloat(on: UnitOnGround, piers: readonly number[], material: DeckMateri
 
 /**
  * How a unit is held along the road. One support near its middle holds it alone, unless two or more neighbouring piers with
- * that one among them, or laminated rubber on all its supports, leave smaller moments at the feet of its piers: braking and
- * friction are then shared by stiffness, 3 E I / h^3 of a pier with the rubber on it in series, and each pier is bent by what
- * the deck moves over it. No pier may be worse off than the one that held it alone. Foundations are taken as rigid: on the
- * safe side for what bends a pier. Units on pylons or with walls of their own, and decks cast into their abutments
+ * that one among them, or laminated rubber on all its supports, leave smaller moments at the feet of its piers, the worst of
+ * them counted twice: braking and friction are then shared by stiffness, 3 E I / h^3 of a pier with the rubber on it in
+ * series, and each pier is bent by what the deck moves over it. Foundations are taken as rigid: on the safe side for what
+ * bends a pier. Units on pylons or with walls of their own, and decks cast into their abutments
  * (`alone`), have one fixed point.
  */
 export function heldAlong(on: UnitOnGround, alone = false): HeldAlong {
@@ -171,15 +171,18 @@ export function heldAlong(on: UnitOnGround, alone = false): HeldAlong {
     return { stiffnessKNm, stillM: stillAt(x, stiffnessKNm), afloat: false };
   });
   const onRubber = afloat(on, piers, material);
-  const before = moments(single);
-  const worst = Math.max(...before);
+  /** Piers are dear by the moments at their feet, and as they are built alike, by the worst of them once more. */
+  const dearness = (system: HeldAlong): number => {
+    const each = moments(system);
+    return sum(each) + Math.max(...each);
+  };
   let best = single;
-  let least = (1 - PAYS) * sum(before);
+  let least = (1 - PAYS) * dearness(single);
   for (const system of onRubber ? [...byPiers, onRubber] : byPiers) {
-    const after = moments(system);
-    if (sum(after) < least && Math.max(...after) <= worst) {
+    const after = dearness(system);
+    if (after < least) {
       best = system;
-      least = sum(after);
+      least = after;
     }
   }
   return best;

@@ -145,7 +145,7 @@ it('seismicLoad(site): acceleration x soil x 2.5 / 1.5 on piers; nothing where i
   expect(seismicLoad({})).toBeNull();
 });
 
-it('standSupports(earthquake) makes piers and foundations stronger, the fixed pier most; a heavier deck more so', () => {
+it('standSupports(earthquake) makes the piers that hold the deck and their foundations stronger; a heavier deck more so', () => {
   const concrete = (groundAccelerationG: number | null, permanentKNm = 130): number[] =>
     standSupports(
       {
@@ -160,7 +160,8 @@ it('standSupports(earthquake) makes piers and foundations stronger, the fixed pi
   const shaken = concrete(0.3);
   expect(concrete(0)).toEqual(calm);
   expect(shaken[1]!).toBeGreaterThan(1.2 * calm[1]!);
-  expect(shaken[1]! - calm[1]!).toBeGreaterThan(shaken[2]! - calm[2]!);
+  // The deck is held by both piers then, so that neither has to carry it all.
+  expect(shaken[2]!).toBeGreaterThan(1.2 * calm[2]!);
   expect(concrete(0.3, 200)[1]! - concrete(null, 200)[1]!).toBeGreaterThan(shaken[1]! - calm[1]!);
 });
 
