@@ -5,8 +5,8 @@ import { spanPaths, spansOf, supportChainages } from './alongOption.ts';
 import { ofOption, perM2Of, rangeOf, withinOf, type Asked } from './asked.ts';
 import { barredBrackets, barredWash } from './clearances.ts';
 import { dimensionChain } from './dimension.ts';
-import { elevationBody, levelRange } from './elevation.ts';
-import { frameOf } from './frame.ts';
+import { elevationBody, levelRange, type LevelRange } from './elevation.ts';
+import { frameOf, type Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { interval } from './interval.ts';
 import { label } from './label.ts';
@@ -118,6 +118,28 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
   );
 }
 
+/** Elevations as they were last drawn, with everything they were drawn from. */
+const drawnLast = new WeakMap<
+  AppraisedOption,
+  { readonly from: readonly unknown[]; readonly piece: Piece }
+>();
+
+/**
+ * The elevation of an option in its row: the one drawn last where nothing it is drawn from has changed. While something is
+ * dragged that holds for all but the reference, and a piece that is the same is passed over when the page is changed.
+ */
+function elevationIn(shared: StackSheet, option: AppraisedOption, frame: Frame, range: LevelRange): Piece {
+  const { input, ink, scale } = shared;
+  const { site, paper, prefix } = input;
+  const { topM, bottomM, cutBelowM } = range;
+  const from = [site, paper, prefix, scale, frame.y(0), frame.fromM, frame.toM, topM, bottomM, cutBelowM];
+  const last = drawnLast.get(option);
+  if (last?.from.every((part, i) => Object.is(part, from[i])) === true) return last.piece;
+  const piece = elevationBody(site, option, frame, ink, range, { plain: scale >= 2000 });
+  drawnLast.set(option, { from, piece });
+  return piece;
+}
+
 function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyPx: number): StackRow {
   const { input, scale, ink } = shared;
   const { site } = input;
@@ -145,7 +167,7 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
   const figureY = isTall ? titleY : Math.min(Math.max(deckY + 10, titleY + 24), bottom - 42);
   const drawn = [
     title(shared, option, titleY, bodyPx),
-    elevationBody(site, option, frame, ink, range, { plain: scale >= 2000 }),
+    elevationIn(shared, option, frame, range),
     dimensionChain(chainages.map(frame.x), dimensionY, spans.map(written), {
       boldest: mainSpan(option),
       halo: true,

@@ -105,7 +105,10 @@ function watchPage(): void {
       }
     },
     async result() {
-      while (performance.now() - lastDrawn < 1500) await new Promise((resolve) => setTimeout(resolve, 50));
+      // A cell says only after 150 ms that it waits.
+      const isSettled = (): boolean =>
+        performance.now() - lastDrawn > 700 && document.querySelector('.cell[data-state="pending"]') === null;
+      while (!isSettled()) await new Promise((resolve) => setTimeout(resolve, 50));
       return {
         updates,
         frames,
@@ -170,6 +173,8 @@ async function drag(
   const busy = await busyMeter(page);
   const field = page.locator(selector).first();
   if ((await field.count()) === 0) return null;
+  // An answer that comes while the next thing is dragged would be counted with it.
+  await page.waitForFunction(() => document.querySelector('.cell[data-state="pending"]') === null);
   await field.scrollIntoViewIfNeeded();
   await page.waitForTimeout(200);
   const box = (await field.boundingBox())!;
