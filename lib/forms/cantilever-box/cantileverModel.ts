@@ -81,8 +81,14 @@ export function cantileverBase(task: UnitTask): CantileverBase {
 /**
  * A depth over the piers with its beam, traffic and superimposed load.
  * @param power of the depth by which the inertia grows towards the piers
+ * @param upright outer webs stand upright, so that the bottom slab is as wide as the box
  */
-export function cantileverModel(base: CantileverBase, pierDepthM: number, power: number): CantileverModel {
+export function cantileverModel(
+  base: CantileverBase,
+  pierDepthM: number,
+  power: number,
+  upright = false,
+): CantileverModel {
   const { task, arms, supportsM, layout } = base;
   const { mostM, mostOverDepth } = cantileverData.bottomSlab;
   const depthsM = pierDepths(arms, task.depthM, pierDepthM);
@@ -100,7 +106,7 @@ export function cantileverModel(base: CantileverBase, pierDepthM: number, power:
   }
   return {
     ...base,
-    layout: { ...layout, slope: webSlope(layout.cells * layout.spacingM, pierDepthM) },
+    layout: { ...layout, slope: upright ? 0 : webSlope(layout.cells * layout.spacingM, pierDepthM) },
     pierDepthM,
     depthsM,
     beam,

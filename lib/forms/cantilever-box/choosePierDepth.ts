@@ -30,7 +30,7 @@ const samePower = 0.25;
 /**
  * Depths over the piers across the published band, deepest first (a shallower box is nowhere thinner, so that each starts
  * from the one before), none less than at midspan: the one with the least worth of concrete
- * and strand among those that hold; where none holds the one that comes nearest.
+ * and strand among those that hold; where none holds the one that comes nearest, with upright webs if those do better.
  */
 export function choosePierDepth(task: UnitTask): HaunchedDeck {
   const base = cantileverBase(task);
@@ -49,12 +49,16 @@ export function choosePierDepth(task: UnitTask): HaunchedDeck {
   let best: Trial | null = null;
   let before: Trial | null = null;
   for (const depthM of depths) {
-    const deck: HaunchedDeck = sized(base, depthM, before?.deck ?? null);
-    const trial: Trial = { deck, worth: worthM3(deck), use: limiting(deck.checks).utilisation };
+    const trial: Trial = trialOf(sized(base, depthM, before?.deck ?? null, false));
     if (best === null || better(trial, best)) best = trial;
     // Worth has one lowest place: once it rises, or nothing holds any more, a shallower pier is no better.
     else break;
     before = trial;
+  }
+  // Upright webs leave more width to the bottom slab, where the depth alone does not do.
+  if (best!.use > holding && base.arms.length > 0) {
+    const upright = trialOf(sized(base, best!.deck.model.pierDepthM, best!.deck, true));
+    if (better(upright, best!)) best = upright;
   }
   return best!.deck;
 }
@@ -63,6 +67,10 @@ interface Trial {
   readonly deck: HaunchedDeck;
   readonly worth: number;
   readonly use: number;
+}
+
+function trialOf(deck: HaunchedDeck): Trial {
+  return { deck, worth: worthM3(deck), use: limiting(deck.checks).utilisation };
 }
 
 function better(one: Trial, other: Trial): boolean {
@@ -75,13 +83,18 @@ function better(one: Trial, other: Trial): boolean {
  * Sizes on a beam with the stiffness of the deck before (a usual one where there is none), and once more where the
  * sections found are stiffer or softer over the piers.
  */
-function sized(base: CantileverBase, pierDepthM: number, before: HaunchedDeck | null): HaunchedDeck {
+function sized(
+  base: CantileverBase,
+  pierDepthM: number,
+  before: HaunchedDeck | null,
+  upright: boolean,
+): HaunchedDeck {
   const guess = before ? powerOf(before) : firstPower;
-  let model = cantileverModel(base, pierDepthM, guess);
+  let model = cantileverModel(base, pierDepthM, guess, upright);
   let box = sizeHaunched(model, before?.box ?? null);
   const power = powerOf({ model, box });
   if (Math.abs(power - guess) > samePower) {
-    model = cantileverModel(base, pierDepthM, power);
+    model = cantileverModel(base, pierDepthM, power, upright);
     box = sizeHaunched(model, box);
   }
   return { model, box, checks: haunchedChecks(model, box) };

@@ -4,7 +4,8 @@ import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { FoundStrands } from './findStrands.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
-import { creepShare, type StagedWeight } from './stages.ts';
+import type { StagedWeight } from './stages.ts';
+import { strandStates, ultimateInUse } from './tendonNeeds.ts';
 
 /** Ultimate bending of a haunched deck where it is used most. */
 export interface HaunchedBending {
@@ -86,14 +87,10 @@ function designMoments(
   found: FoundStrands,
   i: number,
 ): { sagging: number; hogging: number; free: number } {
-  const { uls } = model.standard.factors;
-  const along = found.parasiticBottomKNm[i]!;
-  const crept = along + creepShare * found.parasiticTopKNm[i]!;
-  return {
-    sagging: found.use.ultimateMax[i]! + uls.prestress * Math.max(along, crept),
-    hogging: -(found.use.ultimateMin[i]! + uls.prestress * Math.min(along, crept)),
-    free: -uls.permanent * weight.cantileverKNm[i]!,
-  };
+  const { open, lasting } = strandStates(model, found.stresses);
+  const { max, min } = ultimateInUse(model, weight, found.use, [open, lasting], found, i);
+  const { permanent } = model.standard.factors.uls;
+  return { sagging: max, hogging: -min, free: -permanent * weight.cantileverKNm[i]! };
 }
 
 function worse(known: BendingUse, demandKNm: number, capacityKNm: number, station: number): BendingUse {

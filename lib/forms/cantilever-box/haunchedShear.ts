@@ -7,7 +7,7 @@ import type { CantileverModel } from './cantileverModel.ts';
 import type { FoundStrands } from './findStrands.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
 import type { StagedWeight } from './stages.ts';
-import { strandStates } from './tendonNeeds.ts';
+import { strandStates, ultimateInUse } from './tendonNeeds.ts';
 
 /** Design shear of the outer web by element of the beam, the worse of its two ends. */
 export interface HaunchedShear {
@@ -36,7 +36,8 @@ export function haunchedShear(
   const { most } = model.traffic;
   const torque = curveTorque(model, weight.lastingKNm);
   const lean = Math.hypot(1, layout.slope);
-  const { lasting } = strandStates(model, found.stresses);
+  const states = strandStates(model, found.stresses);
+  const { lasting } = states;
   const demands: WebDemand[] = [];
   let mostKN = 0;
   let chordThere = 0;
@@ -78,7 +79,8 @@ export function haunchedShear(
         at = i;
       }
     }
-    const moment = Math.max(Math.abs(found.use.ultimateMax[at]!), Math.abs(found.use.ultimateMin[at]!));
+    const { max, min } = ultimateInUse(model, weight, found.use, [states.open, states.lasting], found, at);
+    const moment = Math.max(Math.abs(max), Math.abs(min));
     const strands = Math.max(found.top[at]!, found.bottom[at]!);
     const forceKN = found.top[at]! * lasting.topKN + found.bottom[at]! * lasting.bottomKN;
     demands.push({

@@ -30,12 +30,13 @@ export interface StrandState {
   readonly bottomParasitic: number;
 }
 
-/** Design moments at the stations without prestress, kNm: service and ultimate extremes of the deck in use. */
+/** Moments at the stations without prestress, kNm: extremes of the deck in use, in service with its weight. */
 export interface UseMoments {
   readonly openMax: Float64Array;
   readonly openMin: Float64Array;
   readonly lastingMax: Float64Array;
   readonly lastingMin: Float64Array;
+  /** What is laid and drives on the deck, factored. */
   readonly ultimateMax: Float64Array;
   readonly ultimateMin: Float64Array;
 }
@@ -124,10 +125,37 @@ export function useMoments(
     out.lastingMax[i] = lasting + max;
     out.lastingMin[i] = lasting + min;
     const use = uls.superimposed * sup;
-    out.ultimateMax[i] = uls.permanent * Math.max(open, lasting) + use + uls.traffic * most.momentMaxKNm[i]!;
-    out.ultimateMin[i] = uls.permanent * Math.min(open, lasting) + use + uls.traffic * most.momentMinKNm[i]!;
+    out.ultimateMax[i] = use + uls.traffic * most.momentMaxKNm[i]!;
+    out.ultimateMin[i] = use + uls.traffic * most.momentMinKNm[i]!;
   }
   return out;
+}
+
+/**
+ * Design moments of the deck in use at a station, kNm, just joined or after creep: creep moves the moments of the weight and
+ * those of the tendons over the piers together, so that the one is never taken with the other before it.
+ */
+export function ultimateInUse(
+  model: CantileverModel,
+  weight: StagedWeight,
+  use: UseMoments,
+  states: readonly StrandState[],
+  { parasiticTopKNm, parasiticBottomKNm }: Pick<Strands, 'parasiticTopKNm' | 'parasiticBottomKNm'>,
+  i: number,
+): { readonly max: number; readonly min: number } {
+  const { uls } = model.standard.factors;
+  let max = -Infinity;
+  let min = Infinity;
+  states.forEach(({ topParasitic, bottomParasitic }, k) => {
+    const own = (k === 0 ? weight.openKNm : weight.lastingKNm)[i]!;
+    const tendons = topParasitic * parasiticTopKNm[i]! + bottomParasitic * parasiticBottomKNm[i]!;
+    const lasting = uls.prestress * tendons;
+    const sags = own > 0 ? uls.permanent : uls.permanentFavourable;
+    const hogs = own < 0 ? uls.permanent : uls.permanentFavourable;
+    max = Math.max(max, sags * own + lasting + use.ultimateMax[i]!);
+    min = Math.min(min, hogs * own + lasting + use.ultimateMin[i]!);
+  });
+  return { max, min };
 }
 
 /**
@@ -159,7 +187,6 @@ export function strandsNeeded(
   const designKN = strandDesignMPa(model) * model.strandM2 * 1e3;
   const bars = barDesignMPa(model.standardId) * 1e3;
   const topBars = bars * faceBarsM2(model.task.deck.widthM);
-  const ultimatePart = uls.prestress;
   for (let i = 0; i < n; i++) {
     const area = sections.areaM2[i]!;
     const inertia = sections.inertiaM4[i]!;
@@ -192,16 +219,15 @@ export function strandsNeeded(
     const depth = model.depthM[i]!;
     const websM = model.layout.webs * sections.webM[i]!;
     const lowBars = bars * faceBarsM2(sections.bottomWidthM[i]!);
-    // Either end of what creep does to the parasitic moment of the tendons over the piers.
-    const crept = pb + lasting.topParasitic * pt;
-    const hog = Math.max(-(use.ultimateMin[i]! + ultimatePart * Math.min(pb, crept)), -uls.permanent * stage);
+    const ultimate = ultimateInUse(model, weight, use, states, before, i);
+    const hog = Math.max(-ultimate.min, -uls.permanent * stage);
     if (hog > 0) {
       const face = { widthM: sections.bottomWidthM[i]!, flangeM: model.mostBottomM, websM };
       const c = compressionDepth(model, face, nt * designKN + topBars);
       const rest = hog - topBars * (depth - topCover / 2 - c);
       top[i] = Math.max(top[i]!, rest / (designKN * (depth - topCover - c)));
     }
-    const sag = use.ultimateMax[i]! + ultimatePart * Math.max(pb, crept);
+    const sag = ultimate.max;
     if (sag > 0) {
       const face = { widthM: model.task.deck.widthM, flangeM: model.layout.slab.meanM, websM };
       const c = compressionDepth(model, face, nb * designKN + lowBars);

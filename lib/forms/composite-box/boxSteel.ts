@@ -78,6 +78,7 @@ export function boxSteelOf(box: BoxGirderModel) {
       spanRibs,
       frames,
       crossKg,
+      lateralKg: 0,
       substringersKg: 0,
       stiffenersKg: ribsKg,
       bearingStiffenersKg,

@@ -9,3 +9,12 @@ export function strutKgPerM(lengthM: number, standard: StandardId): number {
   const thicknessM = legM / legOverThickness;
   return materials.steelDensityKgM3 * thicknessM * (2 * legM - thicknessM);
 }
+
+/** Gusset plate at the end of an equal angle of a mass, kg/m. */
+export function gussetKg(angleKgPerM: number): number {
+  const { legs, thicknessM } = compositeData.gusset;
+  const { legOverThickness: n } = compositeData.bracingMember;
+  const { steelDensityKgM3 } = materials;
+  const legM = Math.sqrt(angleKgPerM / steelDensityKgM3 / ((2 - 1 / n) / n));
+  return steelDensityKgM3 * thicknessM * (legs * legM) ** 2;
+}

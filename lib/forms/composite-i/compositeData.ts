@@ -37,6 +37,7 @@ const schema = z.object({
       fromM: number,
       mostHeightOverThickness: number,
       fromFlangeOverHeight: number,
+      mostPanelOverHeight: z.object({ lm1: number, hl93: number }),
       widthOverHeight: number,
       slenderness: number,
       source,
@@ -101,6 +102,9 @@ const schema = z.object({
     channelKgPerM: number,
     source,
   }),
+  gusset: z.object({ legs: number, thicknessM: number, perFrame: number, perPanel: number, source }),
+  lateral: z.object({ fromSpanM: number, windFactor: number, strutShare: number, source }),
+  stayInPlaceForms: citedByStandard,
   substringers: z.object({ fromSpanM: number, frameDepthOverGirder: number, strutShare: number, source }),
   bracingMember: z.object({
     slenderness: z.object({ lm1: number, hl93: number }),

@@ -45,6 +45,15 @@ export function girderLines(model: GirderModel, girder: SizedGirder): MeasuredLi
       `${steps(run.bottomM)}, ${mm(run.bottomWidthM)} mm wide`,
     ),
     steel(secondary.crossKg, layout.twin ? 'cross-girders' : 'bracing', crosses),
+    ...(secondary.lateralKg > 0
+      ? [
+          steel(
+            secondary.lateralKg,
+            'bracing in plan',
+            'crossed diagonals between two girders in long spans, wind before there is a slab',
+          ),
+        ]
+      : []),
     ...(model.substringers
       ? [
           steel(
@@ -128,7 +137,8 @@ function paintedM2(model: GirderModel, girder: SizedGirder): number {
   const stringersM2 = model.substringers
     ? model.substringers.lines * model.substringers.beam.paintM2PerM * model.lengthM
     : 0;
-  const secondaryT = (secondary.crossKg + secondary.stiffenersKg + secondary.bearingStiffenersKg) / 1000;
+  const secondaryT =
+    (secondary.crossKg + secondary.lateralKg + secondary.stiffenersKg + secondary.bearingStiffenersKg) / 1000;
   return model.layout.count * perGirder + stringersM2 + compositeData.secondaryPaintM2PerT.value * secondaryT;
 }
 

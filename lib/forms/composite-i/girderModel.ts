@@ -133,7 +133,8 @@ export function modelOn(
   const tops = girderTops(task, layout, slab, modularRatio, modulusMPa);
   const share = task.deck.widthM / layout.count;
   const traffic = trafficOn(slab, girderM, modularRatio);
-  const slabKNm = curve * standard.unitWeights.concreteKNm3 * slab.meanM * share;
+  const formsKNm2 = compositeData.stayInPlaceForms[task.standard];
+  const slabKNm = curve * (standard.unitWeights.concreteKNm3 * slab.meanM + formsKNm2) * share;
   const superimposedKNm = (curve * task.deck.superimposedKNm) / layout.count;
   const thickestM = thickestPlateM(task.standard);
   const yieldMPa = (thicknessM: number): number => steelYield(grade, Math.min(thicknessM, thickestM) * 1000);

@@ -5,14 +5,17 @@ import type { GirderEffects } from './girderEffects.ts';
 import type { GirderModel } from './girderModel.ts';
 import { elementsPerSpan } from './elementsPerSpan.ts';
 import { platesAt, type PlateRun } from './plateRun.ts';
-import { strutKgPerM } from './bracingMember.ts';
+import { gussetKg, strutKgPerM } from './bracingMember.ts';
 import { fieldSplicesKg } from './fieldSplices.ts';
 import { carryingFrameKg } from './substringers.ts';
-import { alongKg } from './webStiffener.ts';
+import { lateralBracingKg } from './lateralBracing.ts';
+import { alongKg, stiffenersBetween } from './webStiffener.ts';
 
 /** Steel of a deck besides webs and flanges, kg for the whole width, and what of it is painted. */
 export interface SecondarySteel {
   readonly crossKg: number;
+  /** Bracing in plan; 0 where there is none. */
+  readonly lateralKg: number;
   readonly substringersKg: number;
   readonly stiffenersKg: number;
   readonly bearingStiffenersKg: number;
@@ -57,7 +60,10 @@ export function secondarySteel(
   const postArea = layout.twin
     ? Math.max(pair, frame / fyKNm2 / (post.leverRatio * post.depthOverGirder * girderM))
     : pair;
-  const stiffenersKg = layout.count * (inner * postArea * webM * density + alongKg(model, run.heightM));
+  const between = stiffenersBetween(model);
+  const stiffenersKg =
+    layout.count *
+    (inner * postArea * webM * density + (between * pair * webM * density) / 2 + alongKg(model, run.heightM));
   const reactions = designReactions(model, effects);
   const bearingM3 = reactions.reduce(
     (sum, kN, j) =>
@@ -70,20 +76,31 @@ export function secondarySteel(
   const substringersKg = model.substringers
     ? model.substringers.lines * model.substringers.beam.massKgPerM * model.lengthM
     : 0;
+  const lateralKg = lateralBracingKg(model);
   const studs = layout.count * studsOnGirder(model, run, effects);
   const studsKg = studs * compositeData.studs.kgEach;
   const splicesKg = layout.count * fieldSplicesKg(model, run);
   const weldsKg =
-    compositeData.weldsAndBoltsShare.value * (plateKg + cross.kg + stiffenersKg + bearingStiffenersKg);
+    compositeData.weldsAndBoltsShare.value *
+    (plateKg + cross.kg + lateralKg + stiffenersKg + bearingStiffenersKg);
   return {
     crossKg: cross.kg,
+    lateralKg,
     substringersKg,
     stiffenersKg,
     bearingStiffenersKg,
     studsKg,
     weldsKg,
     splicesKg,
-    totalKg: cross.kg + substringersKg + stiffenersKg + bearingStiffenersKg + studsKg + weldsKg + splicesKg,
+    totalKg:
+      cross.kg +
+      lateralKg +
+      substringersKg +
+      stiffenersKg +
+      bearingStiffenersKg +
+      studsKg +
+      weldsKg +
+      splicesKg,
     crossGirderM: cross.heightM,
     crossName: cross.name,
     studs,
@@ -158,7 +175,12 @@ function crossFrames(model: GirderModel, inner: number): Cross {
   const bay = (least: number): number => {
     if (substringers) return carryingFrameKg(substringers, model, least);
     if (!deep) return spacingM * least;
-    return 2 * diagonalM * angle(diagonalM / 2, least) + 2 * spacingM * angle(spacingM, least);
+    const chord = angle(spacingM, least);
+    return (
+      2 * diagonalM * angle(diagonalM / 2, least) +
+      2 * spacingM * chord +
+      compositeData.gusset.perFrame * gussetKg(chord)
+    );
   };
   const kg = (count - 1) * (inner * bay(kgPerM) + supports * bay(perSupport));
   return { kg, heightM: 0, name: deep ? 'cross-frames of angles' : 'channels' };

@@ -10,7 +10,7 @@ import type { StandardId, UnitTask } from '../../model/index.ts';
 import type { SlabDesign } from '../common/slab/designSlab.ts';
 import type { FloorBeam } from '../floor/floorBeam.ts';
 import { sizeStringer } from '../floor/sizeFloor.ts';
-import { strutKgPerM } from './bracingMember.ts';
+import { gussetKg, strutKgPerM } from './bracingMember.ts';
 import { compositeData } from './compositeData.ts';
 import type { GirderLayout } from './girderLayout.ts';
 
@@ -44,7 +44,9 @@ export function substringers(
     ecm,
   );
   const { uls } = standard.factors;
-  const dead = slab.meanM * pitchM * standard.unitWeights.concreteKNm3 + (beam.massKgPerM * 9.81) / 1000;
+  const wetKNm2 =
+    slab.meanM * standard.unitWeights.concreteKNm3 + compositeData.stayInPlaceForms[task.standard];
+  const dead = wetKNm2 * pitchM + (beam.massKgPerM * 9.81) / 1000;
   const laid = (task.deck.superimposedKNm / task.deck.widthM) * pitchM;
   const traffic = Math.max(
     ...offsetsM.map((y) => {
@@ -86,5 +88,10 @@ export function carryingFrameKg(
     Math.max(leastKgPerM, (materials.steelDensityKgM3 * forceKN) / stress, strutKgPerM(lengthM, standardId));
   const chordKN = (onFrameKN * spacingM) / 4 / depthM;
   const diagonal = perM(((onFrameKN / 2) * diagonalM) / depthM, diagonalM);
-  return spacingM * (perM(chordKN, spacingM / 2) + perM(chordKN, spacingM)) + 2 * diagonalM * diagonal;
+  const chord = perM(chordKN, spacingM);
+  return (
+    spacingM * (perM(chordKN, spacingM / 2) + chord) +
+    2 * diagonalM * diagonal +
+    compositeData.gusset.perFrame * gussetKg(Math.max(chord, diagonal))
+  );
 }

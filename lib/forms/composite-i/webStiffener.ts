@@ -22,3 +22,16 @@ export function alongKg(model: Pick<GirderModel, 'plate' | 'elementM'>, heightM:
     return sum + (materials.steelDensityKgM3 * model.elementM[e]! * widthM * widthM) / slenderness;
   }, 0);
 }
+
+/** Transverse stiffeners of one girder between its braces, where the web has one along it and the standard limits the panels. */
+export function stiffenersBetween(
+  model: Pick<GirderModel, 'plate' | 'braceAtM' | 'girderM' | 'standardId'>,
+): number {
+  const most = compositeData.web.along.mostPanelOverHeight[model.standardId];
+  const { braceAtM, girderM } = model;
+  if (!(most > 0) || !hasAlong(model, girderM)) return 0;
+  let count = 0;
+  for (let b = 1; b < braceAtM.length; b++)
+    count += Math.ceil((braceAtM[b]! - braceAtM[b - 1]!) / (most * girderM) - 1e-9) - 1;
+  return count;
+}
