@@ -42,8 +42,8 @@ export function outBecause({ study, site }: Workbench, form: FormId): readonly s
 
 /**
  * Searches a form, unless the rules put it out, by its usual method, and by the next one where the rules warn of the first. The cheapest of each
- * method is proposed first, then the next best of all, three at most; the rest is counted by reason. Pauses while the
- * table is laid, and between the searches.
+ * method and of each set of forms is proposed first, as the table tells those apart least surely, then the next best of
+ * all, three at most; the rest is counted by reason. Pauses while the table is laid, and between the searches.
  */
 export function* proposalsFor(bench: Workbench, form: FormId): Work<Proposals> {
   const out = outBecause(bench, form);
@@ -72,6 +72,16 @@ function patternsFor({ site, tables }: Workbench, asked: FormAndMethod): readonl
 /** Options are told apart by their number of supports: the cheaper of two with as many stays. */
 const isFirstOfItsSupports = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
   all.findIndex((other) => supportsOf(other) === supportsOf(one)) === i;
+
+/** Table cost over that of the cheapest up to which other forms for its approaches are still worth working out. */
+const OTHER_FORMS = 1.2;
+
+/** The cheapest arrangement of its set of forms in a list that rises, unless it is far dearer than the cheapest of all. */
+const isFirstOfItsForms = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
+  one.tableCost <= OTHER_FORMS * all[0]!.tableCost &&
+  all.findIndex((other) => formsIn(other) === formsIn(one)) === i;
+
+const formsIn = ({ units }: Arrangement): string => [...new Set(units.map(({ form }) => form))].sort().join();
 
 function* search(bench: Workbench, form: FormId): Work<Proposals> {
   const counts = new Map<string, number>();
@@ -107,9 +117,9 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
     if (found[0] && !meetsTrouble(bench, found[0])) break;
   }
   const byCost = (a: Arrangement, b: Arrangement): number => a.tableCost - b.tableCost;
-  const first = byMethod.flatMap((list) => list.slice(0, 1)).sort(byCost);
-  const rest = byMethod.flatMap((list) => list.slice(1)).sort(byCost);
-  const all = [...first, ...rest];
+  const first = byMethod.flatMap((list) => list.filter(isFirstOfItsForms));
+  const rest = byMethod.flat().filter((one) => !first.includes(one));
+  const all = [...first.sort(byCost), ...rest.sort(byCost)];
   count('dearer than the proposals of its form', all.length - PER_FORM);
   return {
     arrangements: all.slice(0, PER_FORM),
