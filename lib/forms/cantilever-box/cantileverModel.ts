@@ -1,6 +1,7 @@
 import { concrete, loadStandard, materials, type Concrete, type LoadStandard } from '../../actions/index.ts';
 import { imposedCurvature, uniform, type Effects, type LineBeam } from '../../mechanics/index.ts';
 import type { StandardId, UnitTask } from '../../model/index.ts';
+import { depthBand } from '../../rules/index.ts';
 import { supportPositions } from '../common/supports.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { boxLayout, webSlope, type BoxLayout } from '../concrete-box/boxLayout.ts';
@@ -57,9 +58,14 @@ export interface CantileverModel extends CantileverBase {
 /** Lays out the box and the arms. */
 export function cantileverBase(task: UnitTask): CantileverBase {
   const { spansM, standard: standardId } = task;
-  const layout = boxLayout(task);
   const supportsM = supportPositions(spansM);
   const arms = armsOf(spansM);
+  const governingM =
+    arms.length > 0 ? 2 * Math.max(...arms.map(({ haunchM }) => haunchM)) : Math.max(...spansM);
+  const layout = boxLayout(
+    task,
+    Math.max(task.depthM, depthBand('cantilever-box', 'continuous')[1] * governingM),
+  );
   const clearM = layout.spacingM - boxData.webLeastM[standardId];
   const { leastM, clearOverThickness } = boxData.bottomSlab;
   return {
@@ -71,7 +77,7 @@ export function cantileverBase(task: UnitTask): CantileverBase {
     supportsM,
     lengthM: supportsM[supportsM.length - 1]!,
     arms,
-    governingM: arms.length > 0 ? 2 * Math.max(...arms.map(({ haunchM }) => haunchM)) : Math.max(...spansM),
+    governingM,
     strandM2: boxData.strandAreaMm2[standardId] * 1e-6,
     leastWebM: boxData.webLeastM[standardId],
     leastBottomM: roundUp(Math.max(leastM, clearM / clearOverThickness)),

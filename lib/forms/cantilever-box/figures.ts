@@ -2,6 +2,7 @@ import type { Descriptor } from '../../model/index.ts';
 import { formManual } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { acrossFigures } from '../concrete-box/acrossFigures.ts';
+import { strutFigures } from '../concrete-box/strutFigures.ts';
 import { stages, tendons, type Row } from './stageFigures.ts';
 
 const manual = formManual('cantilever-box');
@@ -110,4 +111,5 @@ export const cantileverFigures: readonly Descriptor[] = [
   ...[...section, ...stages, ...tendons].map((row) => sized(...row)),
   ...slabCheckFigures(manual, 'topSlabMidM'),
   ...acrossFigures(manual),
+  ...strutFigures(manual),
 ];

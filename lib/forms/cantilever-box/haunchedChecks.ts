@@ -86,6 +86,7 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
     ),
     trafficDeflection(model, model.concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4),
     ...model.layout.slab.checks,
+    ...(model.layout.struts?.checks ?? []),
   ];
 }
 

@@ -1,8 +1,9 @@
 import type { MeasuredLine } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
-import { acrossLines, diaphragmForms, strandKg } from '../concrete-box/boxLines.ts';
+import { acrossLines, diaphragmForms, strandKg, strutLines } from '../concrete-box/boxLines.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
+import { strutsM3M } from '../concrete-box/struts.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
@@ -25,6 +26,15 @@ function familyKg(model: CantileverModel, strands: Float64Array): number {
 /** All strand, kg. */
 export function strandTotalKg(model: CantileverModel, { found }: SizedHaunched): number {
   return familyKg(model, found.top) + familyKg(model, found.bottom);
+}
+
+/** Concrete of the struts under the wings, m3. */
+export function strutsTotalM3(model: CantileverModel): number {
+  const { struts, slope } = model.layout;
+  return along(
+    model,
+    model.depthM.map((depth) => strutsM3M(struts, depth, slope)),
+  );
 }
 
 /** Pairs of travellers, and how often one is moved to another pier. */
@@ -82,6 +92,7 @@ export function haunchedLines(model: CantileverModel, box: SizedHaunched): Measu
       `up to ${Math.max(...found.bottom)} strands in the bottom slab, ending towards the supports`,
     ),
     ...acrossLines(model),
+    ...strutLines(model, strutsTotalM3(model)),
     measured(
       'deck',
       'box-formwork',

@@ -1,8 +1,9 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { middleStation } from '../common/middleStation.ts';
+import { strutBarsKg, strutFigures } from '../concrete-box/boxReport.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
-import { along, onFalseworkM, strandTotalKg, travellersOf } from './haunchedLines.ts';
+import { along, onFalseworkM, strandTotalKg, strutsTotalM3, travellersOf } from './haunchedLines.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
 /**
@@ -43,7 +44,9 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
   const { layout, beam, task, traffic, lengthM } = model;
   const { sections, found, weight, thicknesses, stresses, shear } = box;
   const areaM2 = lengthM * task.deck.widthM;
-  const concreteM3 = weight.boxM3 + weight.blistersM3 + weight.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
+  const strutsM3 = strutsTotalM3(model);
+  const concreteM3 =
+    strutsM3 + weight.boxM3 + weight.blistersM3 + weight.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
   const { pairs } = travellersOf(model);
   const most = (values: Float64Array): number => values.reduce((a, b) => Math.max(a, b), 0);
   const figures: Record<string, number> = {
@@ -56,6 +59,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
+    ...(layout.struts ? strutFigures(layout.struts) : {}),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,
@@ -88,7 +92,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     shearDesignKN: shear.mostKN,
     chordShearKN: shear.chordKN,
     concreteM3M2: concreteM3 / areaM2,
-    barsKgM3: haunchedBars(model, box).totalKg / concreteM3,
+    barsKgM3: (haunchedBars(model, box).totalKg + strutBarsKg(layout.struts, strutsM3, lengthM)) / concreteM3,
     strandKgM2: strandTotalKg(model, box) / areaM2,
   };
   for (let span = 0; span < task.spansM.length; span++) {

@@ -91,6 +91,7 @@ export function haunchedShear(
       axialMPa: forceKN / sections.areaM2[at]! / 1e3,
       effectiveM: depthM[at]! - cantileverData.topTendons.coverM,
       acrossKNm: webBending(layout, deep, (sections.webM[e]! + sections.webM[e + 1]!) / 2),
+      ...(layout.struts ? { hangKNm: layout.struts.hangKNm } : {}),
     });
   }
   return { demands, webShare, enclosedM2: middle.enclosedM2, mostKN, chordKN: chordThere };

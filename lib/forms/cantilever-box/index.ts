@@ -1,8 +1,9 @@
 import type { Design, UnitTask } from '../../model/index.ts';
+import { midspanDepthBand } from '../../rules/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { overLimit } from '../common/warnings.ts';
-import { boxVariants } from '../concrete-box/boxVariants.ts';
+import { wideBoxVariants } from '../concrete-box/boxVariants.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
 import { choosePierDepth } from './choosePierDepth.ts';
@@ -28,8 +29,9 @@ export const cantileverBox: FormModule = {
     { kind: 'flanked', approach: 'composite-i', side: [0.55, 0.7] },
   ],
   methods: ['balanced-cantilever'],
-  choices: ['transverse'],
-  variants: boxVariants,
+  choices: ['transverse', 'struts'],
+  variants: (spansM, deck, method) =>
+    wideBoxVariants(spansM, deck, method, midspanDepthBand('cantilever-box')![1]),
   size,
 };
 

@@ -9,9 +9,11 @@ import {
 } from '../../mechanics/index.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { diaphragmM3 } from '../concrete-box/boxLoads.ts';
+import { strutsM3M } from '../concrete-box/struts.ts';
 import type { Arm } from './arms.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
+import { haunchShare } from './haunch.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
 
 /** Own weight of the box through its stages. Moments sagging positive, at the stations. */
@@ -58,18 +60,20 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   const { share } = boxData.blisters;
   const gamma = standard.unitWeights.concreteKNm3;
   const weight = gamma * (1 + share);
-  const loadKNm = sections.areaM2.map((area) => weight * area);
+  const strutsKNm = (depthM: number): number =>
+    gamma * strutsM3M(model.layout.struts, depthM, model.layout.slope);
+  const loadKNm = sections.areaM2.map((area, i) => weight * area + strutsKNm(model.depthM[i]!));
   const n = loadKNm.length;
   const atOnce = distributed(beam, loadKNm);
   const longest = arms.length > 0 ? Math.max(...arms.map(({ armM }) => armM)) : 0;
-  const rootKNm = weight * sections.pier.areaM2;
+  const rootKNm = weight * sections.pier.areaM2 + strutsKNm(sections.pier.depthM);
   const { leastM, mostM, mostKN } = cantileverData.segment;
   const segmentM = Math.min(mostM, Math.max(leastM, mostKN / rootKNm));
   const heaviestKN = rootKNm * segmentM;
   const { overSegment, leastKN, mostKN: heaviestTraveller } = cantileverData.traveller;
   const travellerKN = Math.min(heaviestTraveller, Math.max(leastKN, overSegment * heaviestKN));
 
-  const free = freeArms(model, sections, weight, travellerKN, segmentM);
+  const free = freeArms(model, sections, weight, strutsKNm, travellerKN, segmentM);
   const cantileverKNm = new Float64Array(n);
   const armOf = Array.from({ length: n - 1 }, (_, e) => armWith(arms, (beam.xM[e]! + beam.xM[e + 1]!) / 2));
   for (let i = 0; i < n; i++) {
@@ -156,6 +160,7 @@ function freeArms(
   model: CantileverModel,
   sections: HaunchedSections,
   weight: number,
+  strutsKNm: (depthM: number) => number,
   travellerKN: number,
   segmentM: number,
 ): Map<Arm, CantileverMoments> {
@@ -169,7 +174,11 @@ function freeArms(
         cantileverStages(
           {
             armM: arm.armM,
-            weightKNm: (fromPierM) => weight * areaM2(Math.min(1, fromPierM / arm.haunchM)),
+            weightKNm: (fromPierM) => {
+              const way = Math.min(1, fromPierM / arm.haunchM);
+              const deeperM = model.depthsM.get(arm.support)! - model.task.depthM;
+              return weight * areaM2(way) + strutsKNm(model.task.depthM + deeperM * haunchShare(way));
+            },
             travellerKN,
             segmentM: Math.min(segmentM, arm.armM),
           },

@@ -12,6 +12,7 @@ const plates = ['webs', 'top flanges', 'bottom flanges'] as const;
 const otherSteel = [
   'cross-girders',
   'bracing',
+  'bracing in plan',
   'substringers',
   'stiffeners',
   'shear studs',
@@ -287,7 +288,7 @@ export const compositeFigures: readonly Descriptor[] = [
     formula: 'share x (webs + flanges + cross-girders or bracing + stiffeners)',
     inputs: (at) => ({
       share: 'data/composite-i/weldsAndBoltsShare',
-      steel: linesOf(at, ...plates, 'cross-girders', 'bracing', 'stiffeners'),
+      steel: linesOf(at, ...plates, 'cross-girders', 'bracing', 'bracing in plan', 'stiffeners'),
     }),
     compute: ({ share, steel }) => share * sum(steel),
   }),

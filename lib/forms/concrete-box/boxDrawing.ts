@@ -1,5 +1,5 @@
 import type { DeckSpec, SectionCut, Shape } from '../../model/index.ts';
-import { constantDepth } from '../common/depthAlong.ts';
+import { constantDepth, type DepthAlong } from '../common/depthAlong.ts';
 import { deckFace, soffitLine, upright } from '../common/elevation.ts';
 import { deckFurniture } from '../common/furniture.ts';
 import { boxData } from './boxData.ts';
@@ -7,6 +7,7 @@ import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxSection } from './boxSection.ts';
 import type { SizedBox } from './sizeBox.ts';
+import { strutShape } from './struts.ts';
 
 /** The unit from the side: deck face, bottom slab, edge of the overhang, construction joints and diaphragms faint. */
 export function boxElevation(model: BoxModel, box: SizedBox): Shape[] {
@@ -26,23 +27,7 @@ export function boxElevation(model: BoxModel, box: SizedBox): Shape[] {
     const at = j === 0 ? endM / 2 : j === last ? lengthM - endM / 2 : x;
     shapes.push(upright('diaphragm', 'concrete', along, at, layout.slab.midM, inner ? pierM : endM));
   });
-  if (layout.struts) {
-    const { spacingM, sideM } = layout.struts;
-    const { footAboveSoffitM, headBelowTopM } = boxData.struts;
-    const rows = Math.max(1, Math.floor(lengthM / spacingM));
-    const firstM = (lengthM - (rows - 1) * spacingM) / 2;
-    for (let k = 0; k < rows; k++)
-      shapes.push({
-        ...upright(
-          'strut',
-          'concrete',
-          constantDepth(lengthM, task.depthM - footAboveSoffitM),
-          firstM + k * spacingM,
-          headBelowTopM,
-          sideM,
-        ),
-      });
-  }
+  shapes.push(...strutsAlong(layout, along));
   for (const x of jointsOf(model)) shapes.push(upright('construction joint', 'concrete', along, x, 0, 0.02));
   return shapes;
 }
@@ -74,22 +59,36 @@ export function boxSections(model: BoxModel, box: SizedBox): SectionCut[] {
     const pier = longest > 0 ? longest : 1;
     cuts.push(cutOf(model.task.deck, 'pier', model.supportsM[pier]!, box.sections.pier));
   }
-  const struts = strutsOf(model.layout);
+  const struts = strutsOf(model.layout, model.task.depthM);
   return cuts.map((cut) => ({ ...cut, shapes: [...struts, ...cut.shapes] }));
 }
 
-/** Struts under the wings of a section: from the foot of the outer webs to the heads, as lines. */
-function strutsOf({ struts, cells, spacingM }: BoxLayout): Shape[] {
+/** Struts under the wings seen from the side, faint. */
+export function strutsAlong({ struts }: BoxLayout, along: DepthAlong): Shape[] {
+  if (!struts) return [];
+  const { footAboveSoffitM, headBelowTopM } = boxData.struts;
+  const lengthM = along.xM.at(-1)!;
+  const rows = Math.max(1, Math.floor(lengthM / struts.spacingM));
+  const firstM = (lengthM - (rows - 1) * struts.spacingM) / 2;
+  const feet = { xM: along.xM, depthM: along.depthM.map((depth) => depth - footAboveSoffitM) };
+  return Array.from({ length: rows }, (_, k) =>
+    upright('strut', 'concrete', feet, firstM + k * struts.spacingM, headBelowTopM, struts.sideM),
+  );
+}
+
+/** Struts under the wings of a section of a depth, m: from the foot of the outer webs to the heads, as lines. */
+export function strutsOf({ struts, cells, spacingM, slope }: BoxLayout, depthM: number): Shape[] {
   if (!struts) return [];
   const { headBelowTopM } = boxData.struts;
   const headM = (cells * spacingM) / 2 + struts.outM;
+  const { riseM, runM } = strutShape(struts.outM, depthM, slope);
   return [-1, 1].map((side) => ({
     part: 'strut',
     material: 'concrete',
     kind: 'line',
     points: [
       [side * headM, -headBelowTopM],
-      [side * (headM - struts.runM), -headBelowTopM - struts.riseM],
+      [side * (headM - runM), -headBelowTopM - riseM],
     ],
     thicknessM: struts.sideM,
   }));

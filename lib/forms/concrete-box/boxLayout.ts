@@ -35,8 +35,9 @@ export function cellsFor(widthM: number, hasTendonsAcross: boolean): number {
  * As few cells as keep the webs within the practical spacing of a slab, plain or with tendons across the deck, overhangs in
  * a fixed proportion to it, outer webs leaning inwards, and the top slab designed across the webs and, where the wings have
  * them, their struts.
+ * @param deepestM greatest depth of the box, m; `depthM` of the task is the least
  */
-export function boxLayout(task: UnitTask): BoxLayout {
+export function boxLayout(task: UnitTask, deepestM = task.depthM): BoxLayout {
   const { overhangOverSpacing } = boxData.layout;
   const { deck, depthM, standard } = task;
   const across = task.transverse === true;
@@ -58,7 +59,7 @@ export function boxLayout(task: UnitTask): BoxLayout {
   if (!task.struts) return { ...base, ...topSlab(slabCase, across) };
   // The weight of the slab presses on the struts, and their pull thickens the slab a little: twice is enough.
   const first = topSlab(slabCase, across);
-  const strutCase = { standard, deck, plan, depthM, slope };
+  const strutCase = { standard, deck, plan, depthM, deepestM, slope };
   const { tie } = designStruts({ ...strutCase, slab: first.slab });
   const share = across ? loadStandard(standard).factors.sls.vehicle : 1;
   const serviceKNm = tie.lastingKNm + share * tie.trafficKNm;

@@ -7,6 +7,7 @@ import type { BoxModel } from './boxModel.ts';
 import type { Outline } from './boxOutline.ts';
 import { heightUnder } from './heightUnder.ts';
 import type { SizedBox } from './sizeBox.ts';
+import { strutsM3M } from './struts.ts';
 
 /** Measured lines of the superstructure: concrete, bars, strand, formwork and, where cast in place, falsework. */
 export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
@@ -47,7 +48,10 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
       `${layout.webs} webs, ${group.tendonsPerWeb} tendons of ${group.strandsPerTendon.toFixed(1)} strands each${tendons.meanShare < 1 ? `, ${(100 * tendons.meanShare).toFixed(0)} % of them along the mean of the deck` : ''}`,
     ),
   ];
-  lines.push(...acrossLines(model), ...strutLines(model));
+  lines.push(
+    ...acrossLines(model),
+    ...strutLines(model, strutsM3M(layout.struts, task.depthM, layout.slope) * lengthM),
+  );
   if (tendons.straightStrands > 0)
     lines.push(
       measured(
@@ -90,22 +94,25 @@ export function acrossLines({
   ];
 }
 
-/** Struts under the wings and bars of the slab thickened along their heads, where it has them. */
-function strutLines({ layout: { struts }, lengthM }: BoxModel): MeasuredLine[] {
+/** Struts under the wings, `concreteM3` of them, and bars of the slab thickened along their heads, where it has them. */
+export function strutLines(
+  { layout: { struts }, lengthM }: Pick<BoxModel, 'layout' | 'lengthM'>,
+  concreteM3: number,
+): MeasuredLine[] {
   if (!struts) return [];
-  const { spacingM, sideM, concreteM3M, barsKgM, beamBarsKgM, beamM, lengthM: eachM } = struts;
+  const { spacingM, sideM, barsKgM3, beamBarsKgM, beamM } = struts;
   return [
     measured(
       'deck',
       'precast-concrete',
-      concreteM3M * lengthM,
+      concreteM3,
       'struts under the wings',
-      `2 rows every ${spacingM} m, ${mm(sideM)} mm square, ${eachM.toFixed(1)} m long`,
+      `2 rows every ${spacingM} m, ${mm(sideM)} mm square`,
     ),
     measured(
       'deck',
       'reinforcement',
-      barsKgM * lengthM,
+      barsKgM3 * concreteM3,
       'bars of the struts',
       '1 % of their section, laps included',
     ),

@@ -3,6 +3,7 @@ import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxSection } from './boxSection.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
+import { strutsM3M } from './struts.ts';
 
 /** Own weight of the box. */
 export interface OwnWeight {
@@ -21,8 +22,9 @@ export function ownWeight(model: BoxModel, sections: SectionsAlong): OwnWeight {
   const { beam, standard } = model;
   const { share } = boxData.blisters;
   const gamma = standard.unitWeights.concreteKNm3;
-  const strutsM3M = model.layout.struts?.concreteM3M ?? 0;
-  const loadKNm = sections.areaM2.map((area) => gamma * ((1 + share) * area + strutsM3M));
+  const { layout, task } = model;
+  const struts = strutsM3M(layout.struts, task.depthM, layout.slope);
+  const loadKNm = sections.areaM2.map((area) => gamma * ((1 + share) * area + struts));
   let boxM3 = 0;
   for (let e = 0; e < loadKNm.length - 1; e++)
     boxM3 += ((sections.areaM2[e]! + sections.areaM2[e + 1]!) / 2) * (beam.xM[e + 1]! - beam.xM[e]!);

@@ -3,7 +3,7 @@ import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SizedBox } from './sizeBox.ts';
-import type { Struts } from './struts.ts';
+import { strutsM3M, type Struts } from './struts.ts';
 
 /**
  * Characteristic reactions of the whole deck: own weight with diaphragms, superimposed load, traffic. The parasitic part
@@ -46,10 +46,9 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
   const { layout, beam, task, traffic, lengthM } = model;
   const { sections, tendons, own, thicknesses } = box;
   const areaM2 = lengthM * task.deck.widthM;
-  const strutsM3 = (layout.struts?.concreteM3M ?? 0) * lengthM;
+  const strutsM3 = strutsM3M(layout.struts, task.depthM, layout.slope) * lengthM;
   const concreteM3 = strutsM3 + own.boxM3 + own.blistersM3 + own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
-  const strutBarsKg = layout.struts ? (layout.struts.barsKgM + layout.struts.beamBarsKgM) * lengthM : 0;
-  const barsKg = boxBars(model, box).totalKg + strutBarsKg;
+  const barsKg = boxBars(model, box).totalKg + strutBarsKg(layout.struts, strutsM3, lengthM);
   const strands = tendons.strandsPerWeb * layout.webs + tendons.straightStrands;
   const figures: Record<string, number> = {
     cells: layout.cells,
@@ -110,7 +109,13 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
   return figures;
 }
 
-function strutFigures(struts: Struts): Record<string, number> {
+/** Bars of struts and along their heads, kg. */
+export function strutBarsKg(struts: Struts | undefined, strutsM3: number, lengthM: number): number {
+  return struts ? struts.barsKgM3 * strutsM3 + struts.beamBarsKgM * lengthM : 0;
+}
+
+/** Named figures of the struts of a box. */
+export function strutFigures(struts: Struts): Record<string, number> {
   const { outM, sideM, lengthM, riseM, forceKN, tie, hangKNm, beamM } = struts;
   return {
     strutsOutM: outM,

@@ -1,5 +1,4 @@
 import type { DeckSpec, MethodId, Variant } from '../../model/index.ts';
-import { depthBand } from '../../rules/index.ts';
 import { cellsFor } from './boxLayout.ts';
 import { strutPlan } from './strutPlan.ts';
 
@@ -9,21 +8,20 @@ export function boxVariants(_spansM: readonly number[], { widthM }: DeckSpec): r
 }
 
 /**
- * The same for a box of constant depth, whose wings may rest on struts as well, with a plain slab or tendons across it,
- * where one cell without struts no longer carries the deck and struts save a cell. A launched box is pushed out without
- * its wings, and has none.
+ * The same, and wings on struts, with a plain slab or tendons across it, where one cell without struts no longer carries the
+ * deck and struts save a cell. A launched box is pushed out without its wings, and has none.
+ * @param mostOverSpan greatest least depth of the published band over the longest span
  */
 export function wideBoxVariants(
   spansM: readonly number[],
   deck: DeckSpec,
   method: MethodId,
+  mostOverSpan: number,
 ): readonly Variant[] {
   const { widthM } = deck;
   const made: Variant[] = [...boxVariants(spansM, deck)];
   if (method === 'launch' || cellsFor(widthM, true) === 1) return made;
-  const continuity = spansM.length > 1 ? 'continuous' : 'simple';
-  // As far as struts reach in the deepest box of the published band.
-  const depthM = Math.max(...spansM) * depthBand('concrete-box', continuity, method)[1];
+  const depthM = mostOverSpan * Math.max(...spansM);
   const strutted = strutPlan(widthM, depthM, false).cells;
   if (strutted < cellsFor(widthM, false)) made.push({ struts: true });
   if (strutPlan(widthM, depthM, true).cells < Math.min(strutted, cellsFor(widthM, true)))

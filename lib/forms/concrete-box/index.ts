@@ -1,4 +1,5 @@
 import type { Design, UnitTask } from '../../model/index.ts';
+import { depthBand } from '../../rules/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
@@ -25,7 +26,13 @@ export const concreteBox: FormModule = {
   pattern: { kind: 'continuous' },
   methods: ['falsework', 'launch'],
   choices: ['transverse', 'struts'],
-  variants: wideBoxVariants,
+  variants: (spansM, deck, method) =>
+    wideBoxVariants(
+      spansM,
+      deck,
+      method,
+      depthBand('concrete-box', spansM.length > 1 ? 'continuous' : 'simple', method)[1],
+    ),
   size,
 };
 

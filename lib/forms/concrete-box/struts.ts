@@ -30,10 +30,26 @@ export interface Struts {
   readonly beamM: number;
   readonly beamWidthM: number;
   readonly beamBarsKgM: number;
-  /** Both rows per m of deck: concrete, m3, and bars, kg. */
-  readonly concreteM3M: number;
-  readonly barsKgM: number;
+  /** Bars of the struts, kg per m3 of them. */
+  readonly barsKgM3: number;
   readonly checks: readonly Check[];
+}
+
+/** Height, horizontal length and length of a strut in a box of some depth and lean of its webs, m. */
+export function strutShape(
+  outM: number,
+  depthM: number,
+  slope: number,
+): { readonly riseM: number; readonly runM: number; readonly lengthM: number } {
+  const riseM = strutRiseM(depthM);
+  const runM = outM + slope * (depthM - boxData.struts.footAboveSoffitM);
+  return { riseM, runM, lengthM: Math.hypot(riseM, runM) };
+}
+
+/** Concrete of both rows where the box is `depthM` deep, m3 per m of deck; 0 without struts. */
+export function strutsM3M(struts: Struts | undefined, depthM: number, slope: number): number {
+  if (!struts) return 0;
+  return (2 * struts.sideM ** 2 * strutShape(struts.outM, depthM, slope).lengthM) / struts.spacingM;
 }
 
 /** What struts are sized for. */
@@ -41,7 +57,9 @@ export interface StrutCase {
   readonly standard: StandardId;
   readonly deck: DeckSpec;
   readonly plan: StrutPlan;
+  /** Least depth of the box, where struts are flattest, and greatest, where they are longest. */
   readonly depthM: number;
+  readonly deepestM: number;
   /** Horizontal over vertical of the outer webs. */
   readonly slope: number;
   readonly slab: Pick<SlabDesign, 'midM' | 'rootM' | 'edgeM'>;
@@ -51,13 +69,11 @@ export interface StrutCase {
  * Sizes a row of struts from the load on its line of heads: force by the slope of the strut, section as a slender strut of
  * concrete under that force and its own weight, slab thickened along the heads to span from strut to strut.
  */
-export function designStruts({ standard: id, deck, plan, depthM, slope, slab }: StrutCase): Struts {
+export function designStruts({ standard: id, deck, plan, depthM, deepestM, slope, slab }: StrutCase): Struts {
   const { factors, unitWeights } = loadStandard(id);
   const { uls } = factors;
-  const { spacingM, footAboveSoffitM, beamWidthM } = boxData.struts;
-  const riseM = strutRiseM(depthM);
-  const runM = plan.outM + slope * (depthM - footAboveSoffitM);
-  const lengthM = Math.hypot(riseM, runM);
+  const { spacingM, beamWidthM } = boxData.struts;
+  const { riseM, runM, lengthM } = strutShape(plan.outM, depthM, slope);
   const overhangShare = plan.overhangM / (plan.overhangM + plan.outM);
   const thicknessM =
     overhangShare * ((slab.rootM + slab.edgeM) / 2) +
@@ -86,7 +102,9 @@ export function designStruts({ standard: id, deck, plan, depthM, slope, slab }: 
     (uls.permanent * (line.slabKNm + own) + uls.superimposed * line.superimposedKNm) * spacingM +
     uls.traffic * traffic;
   const forceKN = (ultimate * lengthM) / riseM;
-  const strut = designSection(id, forceKN, lengthM, runM);
+  const long = strutShape(plan.outM, deepestM, slope);
+  const longest = { forceKN: (ultimate * long.lengthM) / long.riseM, ...long };
+  const strut = designSection(id, [{ forceKN, lengthM, runM }, longest]);
   const pull = runM / riseM / spacingM;
   return {
     spacingM,
@@ -101,10 +119,9 @@ export function designStruts({ standard: id, deck, plan, depthM, slope, slab }: 
     beamM: beam.depthM,
     beamWidthM,
     beamBarsKgM: 2 * beam.barsKgM,
-    concreteM3M: (2 * strut.sideM ** 2 * lengthM) / spacingM,
-    barsKgM: (2 * barKg(strut.barsM2, lengthM) * slabData.lapAndDetail.value) / spacingM,
+    barsKgM3: slabData.lapAndDetail.value * barKg(boxData.struts.barsShare),
     checks: [
-      check('wing-struts', 'struts under the wings: force', forceKN, strut.capacityKN, 'kN'),
+      check('wing-struts', 'struts under the wings: force', strut.forceKN, strut.capacityKN, 'kN'),
       check(
         'wing-beams',
         'slab along the heads of the struts: bars within the practical ratio',
@@ -122,25 +139,35 @@ export function pressedShare(lengthM: number, sideM: number, offM: number): numb
   return Math.max(0, Math.min(1.14 * even - (0.02 * lengthM) / sideM, even));
 }
 
-/** Least side of a square strut in steps, pinned at both ends, bending under its own weight over its run. */
+/** A strut that a section has to carry. */
+interface StrutLoad {
+  readonly forceKN: number;
+  readonly lengthM: number;
+  readonly runM: number;
+}
+
+/** Least side of a square strut in steps, pinned at both ends, bending under its own weight over its run; the worst used. */
 function designSection(
   id: StandardId,
-  forceKN: number,
-  lengthM: number,
-  runM: number,
-): { readonly sideM: number; readonly capacityKN: number; readonly barsM2: number } {
-  const { leastSideM, mostSideM, sideStepM, bucklingOver, designShare, barsShare } = boxData.struts;
+  loads: readonly StrutLoad[],
+): { readonly sideM: number; readonly forceKN: number; readonly capacityKN: number } {
+  const { leastSideM, mostSideM, sideStepM, bucklingOver, designShare } = boxData.struts;
   const { unitWeights, factors } = loadStandard(id);
   const { fcdMPa } = concrete(id, materials.concreteDefaultMPa[id].box);
-  const capacity = (sideM: number): number => {
+  const capacity = (sideM: number, { forceKN, lengthM, runM }: StrutLoad): number => {
     const own = (factors.uls.permanent * unitWeights.concreteKNm3 * sideM ** 2 * lengthM * runM) / 8;
     const offM = lengthM / bucklingOver + own / forceKN;
     return sideM ** 2 * designShare * fcdMPa * 1e3 * pressedShare(lengthM, sideM, offM);
   };
+  const use = (sideM: number, load: StrutLoad): number =>
+    load.forceKN / Math.max(1e-9, capacity(sideM, load));
+  const worst = (sideM: number): StrutLoad =>
+    loads.reduce((one, other) => (use(sideM, other) > use(sideM, one) ? other : one));
   let sideM = leastSideM;
-  while (sideM < mostSideM - 1e-9 && capacity(sideM) < forceKN) sideM += sideStepM;
+  while (sideM < mostSideM - 1e-9 && use(sideM, worst(sideM)) > 1) sideM += sideStepM;
   sideM = Number(sideM.toFixed(6));
-  return { sideM, capacityKN: capacity(sideM), barsM2: barsShare * sideM ** 2 };
+  const load = worst(sideM);
+  return { sideM, forceKN: load.forceKN, capacityKN: capacity(sideM, load) };
 }
 
 /** Slab thickened along the heads until the bars of one face stay within the practical ratio; bars of one row, kg per m. */

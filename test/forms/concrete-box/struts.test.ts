@@ -129,7 +129,7 @@ describe.each(['lm1', 'hl93'] as const)('concreteBox.size(wide deck on struts, %
 describe('wideBoxVariants(spans, deck, method)', () => {
   it('offers struts beyond what one cell carries without, where they save a cell', () => {
     const has = (widthM: number, method: 'falsework' | 'launch' = 'falsework') =>
-      wideBoxVariants([48, 60, 48], deckOf(widthM), method).some(({ struts }) => struts);
+      wideBoxVariants([48, 60, 48], deckOf(widthM), method, 0.0625).some(({ struts }) => struts);
     expect([13, 17, 19.9, 20.5, 24, 28].map((widthM) => has(widthM))).toEqual([
       false,
       false,
