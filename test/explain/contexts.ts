@@ -168,19 +168,10 @@ export const variants = (): Context =>
       ultimateWidthM: widthM,
     });
     const supportsM = [startM, startM + 0.28 * (endM - startM), startM + 0.72 * (endM - startM), endM];
-    const methods = {
-      'composite-i': 'crane',
-      'concrete-box': 'falsework',
-      'cantilever-box': 'balanced-cantilever',
-    } as const;
-    const kept = (
-      number: number,
-      form: 'composite-i' | 'concrete-box' | 'cantilever-box',
-      variant: Variant,
-    ): KeptOption => ({
+    const kept = (number: number, form: 'composite-i' | 'concrete-box', variant: Variant): KeptOption => ({
       number,
       form,
-      method: methods[form],
+      method: form === 'composite-i' ? 'crane' : 'falsework',
       units: [{ form, role: 'main', supportsM }],
       depthM: null,
       variant,
@@ -202,12 +193,11 @@ export const variants = (): Context =>
       options: {
         ...options,
         forms: ['composite-i'],
-        workOutAnyway: ['composite-i', 'concrete-box', 'cantilever-box'],
+        workOutAnyway: ['composite-i', 'concrete-box'],
         kept: [
           kept(40, 'composite-i', { haunchRatio: 1.6, substringers: true }),
           kept(41, 'concrete-box', { transverse: true }),
           kept(42, 'concrete-box', { struts: true }),
-          kept(43, 'cantilever-box', { struts: true }),
         ],
       },
     };
