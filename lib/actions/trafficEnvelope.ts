@@ -1,10 +1,10 @@
 import {
-  addLine,
+  beamStretches,
   beamTrack,
   deflectionLine,
+  reactionLines,
   sectionLine,
   sources,
-  stretchOf,
   uniform,
   type Extremes,
   type LineBeam,
@@ -60,13 +60,8 @@ export function trafficEnvelope(
   };
   let beyond = false;
 
-  // Sum of the reactions to the left of the section (its shear) and of their moments about the start of the beam.
-  const Q = new Float64Array(4 * (n - 1));
-  const T = new Float64Array(4 * (n - 1));
   const line = new Float64Array(4 * (n - 1));
-  const at = sources(beam);
-  const reactionsAt = new Map<number, number[]>();
-  at.forEach((station, j) => reactionsAt.set(station, [...(reactionsAt.get(station) ?? []), j]));
+  const { left, right } = beamStretches(beam);
   const shear = (s: number, stretch: Stretch): void => {
     const of = { stretch, station: s, arm: 1, turn: 0 };
     sectionLine(of, line);
@@ -75,34 +70,26 @@ export function trafficEnvelope(
     result.shearMaxKN[s] = Math.max(result.shearMaxKN[s]!, out.max);
     result.shearMinKN[s] = Math.min(result.shearMinKN[s]!, out.min);
   };
-  if (beam.startMomentLine) addLine(T, -1, beam.startMomentLine);
-  let stretch = stretchOf(xM, Q, T);
   for (let s = 0; s < n; s++) {
     const x = xM[s]!;
-    const of = { stretch, station: s, arm: x, turn: 1 };
+    const of = { stretch: left[s]!, station: s, arm: x, turn: 1 };
     sectionLine(of, line);
     // Along a span the hogging part has the same sign as under a uniform load (points of contraflexure).
     const quest = { section: s, hogging: hogs[s]! < -1e-9 * x * x, innerReaction: false, of };
     beyond = trafficOnLine(load, track, line, quest, out) || beyond;
     result.momentMaxKNm[s] = out.max;
     result.momentMinKNm[s] = out.min;
-
-    const here = reactionsAt.get(s) ?? [];
-    if (s > 0) shear(s, stretch);
-    for (const j of here) {
-      addLine(Q, 1, beam.reactionLines[j]!);
-      addLine(T, x, beam.reactionLines[j]!);
-    }
-    if (here.length > 0) stretch = stretchOf(xM, Q, T);
-    if (s < n - 1 && (here.length > 0 || s === 0)) shear(s, stretch);
+    if (s > 0) shear(s, left[s]!);
+    if (s < n - 1 && (right[s] !== left[s] || s === 0)) shear(s, right[s]!);
   }
 
+  const at = sources(beam);
   const supports = beam.supportAt.length;
   at.forEach((station, j) => {
     const inner = station > 0 && station < n - 1;
     // The line of an end support breaks off at its peak, where the vehicle may stand with axles already past the end.
     const quest = { section: inner ? -1 : station, hogging: false, innerReaction: inner && j < supports };
-    beyond = trafficOnLine(shearLoad, track, beam.reactionLines[j]!, quest, out) || beyond;
+    beyond = trafficOnLine(shearLoad, track, reactionLines(beam)[j]!, quest, out) || beyond;
     const [max, min] =
       j < supports ? [result.reactionMaxKN, result.reactionMinKN] : [result.springMaxKN, result.springMinKN];
     max[j < supports ? j : j - supports] = out.max;

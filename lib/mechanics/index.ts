@@ -21,7 +21,9 @@ export { addLine, deflectionLine, momentLine, shearLine, sources } from './beam/
 export { loadTrack, reversed, type AxleGroup, type Track } from './placing/track.ts';
 export { beamTrack, straightLine } from './placing/beamTrack.ts';
 export { runGroup, type Extremes } from './placing/axles.ts';
-export { sectionLine, stretchOf, type Stretch, type StretchSection } from './placing/stretch.ts';
+export { reactionLines } from './beam/reactionLines.ts';
+export { beamStretches } from './placing/beamStretches.ts';
+export { sectionLine, type Stretch, type StretchSection } from './placing/stretch.ts';
 export { runTwoGroups } from './placing/twoGroups.ts';
 export { lineAreas, type LineAreas } from './placing/areas.ts';
 export {

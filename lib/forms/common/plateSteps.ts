@@ -21,7 +21,7 @@ export function plateSteps(
   roundUp: (thicknessM: number) => number,
 ): Float64Array {
   const n = needM.length;
-  const rolled = Float64Array.from({ length: n }, (_, e) => roundUp(needM[e]!));
+  const rolled = new Float64Array(n).map((_, e) => roundUp(needM[e]!));
   const best = new Float64Array(n + 1).fill(Infinity);
   const from = new Int32Array(n + 1);
   best[0] = 0;
@@ -59,9 +59,12 @@ function mirroredWeights(lengthM: ArrayLike<number>): Float64Array {
   let total = 0;
   for (let e = 0; e < lengthM.length; e++) total += lengthM[e]!;
   let x = 0;
-  return Float64Array.from(lengthM, (length) => {
+  const weighted = new Float64Array(lengthM.length);
+  for (let e = 0; e < weighted.length; e++) {
+    const length = lengthM[e]!;
     const away = Math.abs(x + length / 2 - total / 2) / total;
     x += length;
-    return length * (1 + 1e-7 * away);
-  });
+    weighted[e] = length * (1 + 1e-7 * away);
+  }
+  return weighted;
 }

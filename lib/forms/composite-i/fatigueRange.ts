@@ -1,9 +1,10 @@
 import { rigidCrossbeam } from '../../actions/index.ts';
 import {
+  beamStretches,
   beamTrack,
-  momentLine,
   reversed,
   runGroup,
+  sectionLine,
   type AxleGroup,
   type Extremes,
   type LineBeam,
@@ -48,22 +49,22 @@ export function fatigueRange(model: GirderModel, beam: LineBeam): Float64Array {
     vehicle.loadFactor *
     (1 + vehicle.allowance) *
     (model.plate?.lorryShare ?? fatigueShare(model.task.deck, model.layout.offsetsM));
-  const group: AxleGroup = { atM: vehicle.atM, loadKN: vehicle.axlesKN.map((kN) => kN * scale), whole: true };
-  const back = reversed(group);
-  const symmetrical = back.atM.every((x, i) => Math.abs(x - group.atM[i]!) < 1e-9);
+  const lorries = lorriesOf(model.standardId);
   const track = beamTrack(beam);
+  const { left } = beamStretches(beam);
   const stations = beam.xM.length;
   const range = new Float64Array(stations);
   const out: Extremes = { max: 0, min: 0 };
+  const line = new Float64Array(4 * (stations - 1));
   for (let s = 0; s < stations; s += stride) {
-    const line = momentLine(beam, s);
-    runGroup(track, group, line, -1, out);
-    let most = out.max - out.min;
-    if (!symmetrical) {
-      runGroup(track, back, line, -1, out);
+    const of = { stretch: left[s]!, station: s, arm: beam.xM[s]!, turn: 1 };
+    sectionLine(of, line);
+    let most = 0;
+    for (const lorry of lorries) {
+      runGroup(track, lorry, line, -1, out, of);
       most = Math.max(most, out.max - out.min);
     }
-    range[s] = most * damage(model, beam, s);
+    range[s] = scale * most * damage(model, beam, s);
   }
   for (let s = 0; s < stations; s++) {
     const before = s - (s % stride);
@@ -71,6 +72,21 @@ export function fatigueRange(model: GirderModel, beam: LineBeam): Float64Array {
     range[s] = range[before]! + ((range[before + stride]! - range[before]!) * (s - before)) / stride;
   }
   return range;
+}
+
+const lorriesKnown = new Map<StandardId, readonly AxleGroup[]>();
+
+/** The fatigue lorry of a standard by itself, both ways round where that differs, made once. */
+function lorriesOf(standard: StandardId): readonly AxleGroup[] {
+  const known = lorriesKnown.get(standard);
+  if (known) return known;
+  const { atM, axlesKN } = compositeData.fatigue[standard];
+  const group: AxleGroup = { atM, loadKN: axlesKN, whole: true };
+  const back = reversed(group);
+  const symmetrical = back.atM.every((x, i) => Math.abs(x - atM[i]!) < 1e-9);
+  const made = symmetrical ? [group] : [group, back];
+  lorriesKnown.set(standard, made);
+  return made;
 }
 
 /** Damage equivalent factor of EN 1993-2 9.5.2 at a station; 1 where the standard has none. */

@@ -1,5 +1,6 @@
 import { solveBand } from './bandFactor.ts';
 import { elementLine, type LineBeam } from './lineBeam.ts';
+import { reactionLines } from './reactionLines.ts';
 
 /**
  * Influence lines for a unit load that goes down. Element lines hold four numbers an element (value and slope at its
@@ -37,7 +38,7 @@ export function momentLine(beam: LineBeam, station: number): Float64Array {
   const { xM } = beam;
   const line = beam.startMomentLine ? Float64Array.from(beam.startMomentLine) : emptyLine(beam);
   sources(beam).forEach((at, j) => {
-    if (at < station) addLine(line, xM[station]! - xM[at]!, beam.reactionLines[j]!);
+    if (at < station) addLine(line, xM[station]! - xM[at]!, reactionLines(beam)[j]!);
   });
   addLoadMoment(line, xM, station);
   return line;
@@ -47,7 +48,7 @@ export function momentLine(beam: LineBeam, station: number): Float64Array {
 export function shearLine(beam: LineBeam, station: number, side: 'left' | 'right'): Float64Array {
   const line = emptyLine(beam);
   sources(beam).forEach((at, j) => {
-    if (at < station || (at === station && side === 'right')) addLine(line, 1, beam.reactionLines[j]!);
+    if (at < station || (at === station && side === 'right')) addLine(line, 1, reactionLines(beam)[j]!);
   });
   addLoadShear(line, station);
   return line;
@@ -77,7 +78,7 @@ export function momentInfluence(beam: LineBeam, station: number): Float64Array {
   sources(beam).forEach((at, j) => {
     if (at >= station) return;
     const arm = x - xM[at]!;
-    const line = beam.reactionLines[j]!;
+    const line = reactionLines(beam)[j]!;
     for (let e = 0; e < last; e++) values[e] = values[e]! + arm * line[4 * e]!;
     values[last] = values[last]! + arm * line[4 * last - 2]!;
   });
@@ -96,7 +97,7 @@ export function shearInfluence(
 
 /** Reaction of a rigid support, kN, of a unit load at every station. */
 export function reactionInfluence(beam: LineBeam, support: number): Float64Array {
-  const line = beam.reactionLines[support];
+  const line = reactionLines(beam)[support];
   if (!line || support >= beam.supportAt.length) {
     throw new RangeError(`support: expected 0 to ${beam.supportAt.length - 1}, received ${support}`);
   }
@@ -105,7 +106,7 @@ export function reactionInfluence(beam: LineBeam, support: number): Float64Array
 
 /** Force of an elastic support, kN, of a unit load at every station. */
 export function springInfluence(beam: LineBeam, spring: number): Float64Array {
-  const line = beam.reactionLines[beam.supportAt.length + spring];
+  const line = reactionLines(beam)[beam.supportAt.length + spring];
   if (!line) throw new RangeError(`spring: expected 0 to ${beam.springAt.length - 1}, received ${spring}`);
   return atStations(line);
 }

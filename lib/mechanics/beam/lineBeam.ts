@@ -31,12 +31,7 @@ export interface LineBeam {
   readonly factors: Float64Array;
   /** Freedoms held at a prescribed value. */
   readonly fixed: readonly number[];
-  /**
-   * Influence line of every reaction, rigid supports first, then springs: four numbers an element (value and slope
-   * at its left end, value and slope at its right end).
-   */
-  readonly reactionLines: readonly Float64Array[];
-  /** The same for the moment at a start built in against rotation; null at an ordinary start. */
+  /** Element line, see `reactionLines`, of the moment at a start built in against rotation; null at an ordinary start. */
   readonly startMomentLine: Float64Array | null;
 }
 
@@ -81,25 +76,10 @@ export function lineBeam(geometry: BeamGeometry): LineBeam {
     stiffness,
     factors,
     fixed,
-    reactionLines: [] as Float64Array[],
     startMomentLine: null as Float64Array | null,
   };
-  const u = new Float64Array(freedoms.count);
-  for (let j = 0; j < mesh.supportAt.length; j++) {
-    u.fill(0);
-    prescribe(beam, fixed[j]!, 1, u);
-    solveBand(factors, freedoms.count, u);
-    beam.reactionLines.push(elementLine(beam, u));
-  }
-  mesh.springAt.forEach((station, i) => {
-    u.fill(0);
-    u[freedoms.w[station]!] = springKNPerM[i]!;
-    for (const freedom of fixed) u[freedom] = 0;
-    solveBand(factors, freedoms.count, u);
-    beam.reactionLines.push(elementLine(beam, u));
-  });
   if (geometry.fixedEnds?.start) {
-    u.fill(0);
+    const u = new Float64Array(freedoms.count);
     // Unit load and unit end rotation do the same work on each other (Betti), so the moment is minus the shape.
     prescribe(beam, freedoms.right[0]!, -1, u);
     solveBand(factors, freedoms.count, u);
