@@ -59,6 +59,10 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
       const octaves = Math.log(spanM / rows.spansM[i]!) / Math.log(rows.spansM[i + 1]! / rows.spansM[i]!);
       return low * Math.pow(high / low, octaves);
     };
+    let asking: { form?: FormId; mean: number; onLoads: ReturnType<typeof between> } = {
+      mean: NaN,
+      onLoads: [0, 0],
+    };
     return {
       deckPerM(form, spanM, governingM) {
         const governing = Math.max(governingM, spanM);
@@ -71,9 +75,14 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
         read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),
       support(form, chainageM, spanLeftM, spanRightM) {
         const mean = (spanLeftM + spanRightM) / 2;
-        const rows = rowsBy(form);
-        const [i, share] = between(rows.spansM, mean);
-        const [k, within] = between(PIER_LOADS_KN, rows.row(share > 0.5 ? i + 1 : i).loadKNm * mean);
+        // Asked for place after place with the same spans.
+        if (form !== asking.form || mean !== asking.mean) {
+          const rows = rowsBy(form);
+          const [i, share] = between(rows.spansM, mean);
+          const loadKN = rows.row(share > 0.5 ? i + 1 : i).loadKNm * mean;
+          asking = { form, mean, onLoads: between(PIER_LOADS_KN, loadKN) };
+        }
+        const [k, within] = asking.onLoads;
         const low = pierCost(chainageM, k);
         return within > 0 ? low + within * (pierCost(chainageM, k + 1) - low) : low;
       },
