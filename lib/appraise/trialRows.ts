@@ -140,8 +140,11 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     const whole = sized(spanM, depthM, 1);
     yield;
     // Only a continuous unit has shorter spans of the same depth.
-    const perM = SHARES.map((share) =>
-      share === 1 || kind !== 'continuous' ? whole.perM : sized(share * spanM, depthM, 1).perM,
+    // Where no depth of the band is strong enough, what is lacking has its price: a span that fails is no bargain.
+    const weak = Math.max(1, whole.design.limitingCheck.utilisation);
+    const perM = SHARES.map(
+      (share) =>
+        weak * (share === 1 || kind !== 'continuous' ? whole.perM : sized(share * spanM, depthM, 1).perM),
     );
     yield;
     const double = hung ? sized(spanM, depthM, 2) : null;
