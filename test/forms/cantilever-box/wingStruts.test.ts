@@ -40,10 +40,8 @@ describe('cantileverBox.size(wide deck on struts)', () => {
 
   it('shows them in both cuts, steeper at the pier', () => {
     const steep = strutted.sections.map(({ shapes }) => {
-      const [[x0 = 0, z0 = 0] = [], [x1 = 0, z1 = 0] = []] = shapes.find(
-        ({ part }) => part === 'strut',
-      )!.points;
-      return Math.abs((z1 - z0) / (x1 - x0));
+      const [head, foot] = shapes.find(({ part }) => part === 'strut')!.points;
+      return Math.abs((foot![1] - head![1]) / (foot![0] - head![0]));
     });
     expect(steep).toHaveLength(2);
     expect(steep[1]!).toBeGreaterThan(steep[0]!);
