@@ -104,3 +104,12 @@ const small = 'no one two three four five six seven eight nine ten eleven twelve
 
 /** A count in words up to twelve, in figures beyond. */
 export const countWords = (count: number): string => small[count] ?? String(count);
+
+/** Curves flatter than this cannot be told from a straight on any drawing of a crossing, m. */
+const FLATTEST_M = 100_000;
+
+/** Radius of a curve of the road, m, to the ten metres; of one that is straight to the eye only that. */
+export const radiusText = (radiusM: number): string =>
+  Math.abs(radiusM) > FLATTEST_M
+    ? `> ${fixed(FLATTEST_M, 0)}`
+    : fixed(Math.round(Math.abs(radiusM) / 10) * 10, 0);

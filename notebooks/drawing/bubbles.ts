@@ -24,10 +24,13 @@ export function bubbles(
   const seen = at
     .map((m, index) => ({ m, index }))
     .filter(({ m }) => m >= frame.fromM - 1e-6 && m <= frame.toM + 1e-6);
+  // A bubble stands on the sheet, whatever room its support has beside it.
+  const [least, most] = [frame.left + bubbleRadius + 1, frame.right - bubbleRadius - 1];
   const places: number[] = [];
   for (const { m } of seen) {
+    const home = Math.max(least, Math.min(most, frame.x(m)));
     const last = places[places.length - 1];
-    places.push(last === undefined ? frame.x(m) : Math.max(frame.x(m), last + 2 * bubbleRadius + 2));
+    places.push(last === undefined ? home : Math.max(home, last + 2 * bubbleRadius + 2));
   }
   return g(
     { class: 'bubbles' },

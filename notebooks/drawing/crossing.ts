@@ -1,4 +1,4 @@
-import { fixed, length } from '../format.ts';
+import { fixed, length, radiusText } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
 import { siteOf } from '../model.ts';
@@ -89,7 +89,7 @@ function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
     {},
     at(
       false,
-      `R ${fixed(Math.round(crestRadiusM / 10) * 10, 0)}, ${say(first.gradient)}`,
+      `R ${radiusText(crestRadiusM)}, ${say(first.gradient)}`,
       ofOption(option, 'profile/crestRadiusM'),
     ),
     at(true, say(after)),

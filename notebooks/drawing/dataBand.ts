@@ -28,7 +28,11 @@ const nameRoom = 40;
  * Chainages at which the band states its figures: supports first, then ends of limits and barred stretches, then bends
  * of the ground, then tens; each is taken only where there is room for its figure.
  */
-function bandChainages(site: Site, option: AppraisedOption | null, frame: Frame): number[] {
+function bandChainages(
+  site: Site,
+  option: AppraisedOption | null,
+  frame: Frame,
+): { readonly at: number; readonly x: number }[] {
   // Levels far below the datum are longer than those above it.
   const pitch = Math.max(33, ...site.groundZ.map((z) => textWidth(level(z), letters.drawing) + 3));
   const ground = site.groundX.filter((x, index) => {
@@ -49,25 +53,29 @@ function bandChainages(site: Site, option: AppraisedOption | null, frame: Frame)
     });
   const tens: number[] = [];
   for (let x = Math.ceil(site.startM / 10) * 10; x <= site.endM; x += 10) tens.push(x);
-  const taken: number[] = [];
-  const take = (at: number): boolean => {
-    const x = frame.x(at);
-    if (at < frame.fromM || at > frame.toM || x < frame.left + nameRoom + 14 || x > frame.right - 16)
-      return false;
-    if (taken.some((other) => Math.abs(frame.x(other) - x) < pitch)) return false;
-    taken.push(at);
+  const taken: { readonly at: number; readonly x: number }[] = [];
+  const [least, most] = [frame.left + nameRoom + 14, frame.right - 16];
+  const take = (at: number, isEnd = false): boolean => {
+    const home = frame.x(at);
+    // Figures of an abutment at the edge of the sheet step inside: they say their chainage.
+    const x = isEnd ? Math.max(least, Math.min(most, home)) : home;
+    if (at < frame.fromM || at > frame.toM || x < least || x > most) return false;
+    if (taken.some((other) => Math.abs(other.x - x) < pitch)) return false;
+    taken.push({ at, x });
     return true;
   };
   const supports = option === null ? [site.startM, site.endM] : supportChainages(option);
+  take(site.startM, true);
+  take(site.endM, true);
   for (const at of supports) take(at);
-  for (const places of tightest) places.some(take);
+  for (const places of tightest) places.some((at) => take(at));
   for (const at of [
     ...site.zones.filter((zone) => zone.hard).flatMap((zone) => [zone.fromM, zone.toM]),
     ...ground,
     ...tens,
   ])
     take(at);
-  return taken.sort((a, b) => a - b);
+  return taken.sort((a, b) => a.at - b.at);
 }
 
 interface Row {
@@ -100,7 +108,8 @@ export function dataBand(
   readonly height: number;
   readonly table: { readonly head: string[]; readonly rows: string[][] };
 } {
-  const places = bandChainages(site, option, frame);
+  const columns = bandChainages(site, option, frame);
+  const places = columns.map(({ at }) => at);
   const show = (value: number): string => (Number.isFinite(value) ? level(value) : unknownMark);
   const spare = (at: number): number =>
     option === null ? NaN : lowestSoffit(site, option, at) - leastSoffit(site, at);
@@ -152,7 +161,13 @@ export function dataBand(
     { class: 'band' },
     datumLine(frame, { levelM: style.datumM, y }, pens.medium),
     el('path', {
-      d: places.map((at) => `M${num(frame.x(at))},${num(y - 4)}v4`).join(''),
+      d: columns
+        .map(
+          ({ at, x }) =>
+            `M${num(frame.x(at))},${num(y - 4)}v4${x === frame.x(at) ? '' : `L${num(x)},${num(y + 4)}`}`,
+        )
+        .join(''),
+      fill: 'none',
       stroke: colours.ink,
       'stroke-width': pens.thin,
     }),
@@ -162,9 +177,9 @@ export function dataBand(
         {},
         index > 0 && line(y + index * bandRow, colours.rule, pens.fine),
         label(frame.left + 2, base, row.name, { fill: colours.second, size: letters.drawing }),
-        places.map((at) => {
+        columns.map(({ at, x }) => {
           const isLeast = row.value !== undefined && Math.abs(row.value(at) - least) < 0.005;
-          return label(frame.x(at), base, row.figure(at), {
+          return label(x, base, row.figure(at), {
             anchor: 'middle',
             weight: row.bold === true || isLeast ? 600 : 400,
             fill: row.fill?.(at) ?? colours.ink,

@@ -1,4 +1,4 @@
-import { chainage, fixed, length, level } from '../format.ts';
+import { chainage, fixed, length, level, radiusText } from '../format.ts';
 import type { AppraisedOption, Site, Support } from '../model.ts';
 import { siteOf } from '../model.ts';
 import { roadLevel, spansOf, supportChainages, supportName } from './alongOption.ts';
@@ -42,9 +42,7 @@ function write(site: Site, option: AppraisedOption): string {
       : `${level(midspan)} m at midspan and ${level(support)} m at the supports of the main unit`;
   const { crestRadiusM } = option.profile;
   const road = `${level(roadLevel(option, own.startM))} at A and ${level(roadLevel(option, own.endM))} at B, ${
-    crestRadiusM === null
-      ? 'straight between them'
-      : `over a crest of ${fixed(Math.round(crestRadiusM / 10) * 10, 0)} m radius`
+    crestRadiusM === null ? 'straight between them' : `over a crest of ${radiusText(crestRadiusM)} m radius`
   }`;
   const clear = roadNeeds(site, option).map(({ limit, spareM, atM }) => {
     const { reason, levelM } = site.soffitLimits[limit]!;

@@ -1,4 +1,4 @@
-import { fixed, minus } from '../format.ts';
+import { fixed, minus, radiusText } from '../format.ts';
 import type { AppraisedOption } from '../model.ts';
 import { ofOption } from './asked.ts';
 import type { Frame } from './frame.ts';
@@ -18,9 +18,6 @@ const percent = (gradient: number): string =>
     ? 'level'
     : `${gradient < 0 ? minus : '+'}${fixed(Math.abs(gradient) * 100, 1)} %`;
 
-/** A radius to the ten metres. */
-const radius = (radiusM: number): string => `R ${fixed(Math.round(Math.abs(radiusM) / 10) * 10, 0)}`;
-
 /** Under the levels: where the road runs straight and where it bends, with gradients and radii, between uprights. */
 export function gradientRow(
   option: AppraisedOption,
@@ -39,7 +36,7 @@ export function gradientRow(
       const { radiusM } = stretch;
       const isCurve = radiusM !== null;
       const words = isCurve
-        ? `${radiusM < 0 ? 'crest' : 'sag'} ${radius(radiusM)}, ${percent(stretch.fromGradient)} to ${percent(stretch.toGradient)}`
+        ? `${radiusM < 0 ? 'crest' : 'sag'} R ${radiusText(radiusM)}, ${percent(stretch.fromGradient)} to ${percent(stretch.toGradient)}`
         : percent(stretch.fromGradient);
       const lengthWords = `${words}, ${fixed(stretch.toM - stretch.fromM, 0)} m`;
       const room = x1 - x0 - 6;

@@ -88,6 +88,25 @@ function needPieces(
   );
 }
 
+/** Where the ground runs out of the drawing below: how deep it goes, said beside its middle; null where all of it is drawn. */
+function cutWords(
+  site: Site,
+  ground: readonly (readonly [x: number, y: number])[],
+  datumY: number,
+  room: Placer,
+): Piece | null {
+  const below = ground.filter(([, y]) => y > datumY).map(([x]) => x);
+  if (below.length === 0) return null;
+  const words = `ground down to ${level(Math.min(...site.groundZ))} is not drawn`;
+  const wide = textWidth(words, letters.drawing);
+  const middle = (Math.min(...below) + Math.max(...below)) / 2;
+  const places = [5, 18, 31].map((up) => [middle - wide / 2, datumY - up] as const);
+  const chosen =
+    places[room.choose(places.map(([x, y]) => ({ left: x, right: x + wide, top: y - 9, bottom: y + 3 })))] ??
+    places[0]!;
+  return label(chosen[0], chosen[1], words, { fill: colours.second, halo: true });
+}
+
 /**
  * The road over an option along the chainage of the drawing it stands under: ground, the road as proposed and as it runs,
  * the level each headroom and flood needs for the depth, gradients and vertical curves. Heights are exaggerated by a round
@@ -140,6 +159,7 @@ export function roadProfile(input: RoadProfileInput): Piece {
     2,
     1,
   );
+  const cut = cutWords(site, groundLine, datum.y, room);
   for (const { points } of needs)
     room.takeLine(
       points.map(([at, m]) => [frame.x(at), y(m)] as const),
@@ -218,6 +238,7 @@ export function roadProfile(input: RoadProfileInput): Piece {
           'stroke-dasharray': '6 3.4',
         }),
         needPieces(site, needs, frame, ink.accent, room),
+        cut,
         el('path', {
           'data-part': 'road',
           d: pathOf(road),

@@ -1,5 +1,5 @@
 import { ofOption } from '../drawing/asked.ts';
-import { fixed } from '../format.ts';
+import { fixed, radiusText } from '../format.ts';
 import type { HtmlChild } from '../html.ts';
 import type { AppraisedOption } from '../model.ts';
 import { workedFigure } from '../page/index.ts';
@@ -12,11 +12,7 @@ export function roadWords(option: AppraisedOption): HtmlChild {
   return [
     crestRadiusM === null
       ? 'The road runs straight between the abutments'
-      : [
-          'The road runs over a crest of ',
-          figure('crestRadiusM', fixed(Math.round(crestRadiusM / 10) * 10, 0)),
-          ' m radius',
-        ],
+      : ['The road runs over a crest of ', figure('crestRadiusM', radiusText(crestRadiusM)), ' m radius'],
     ', nowhere steeper than ',
     figure('steepestGradient', fixed(100 * steepestGradient, 1)),
     ' % there; its approaches take ',

@@ -17,6 +17,10 @@ const list: Path = ['brief', 'deck'];
 /** Widest drawing of a deck, px: the body of the sheet without the margins of the drawing. */
 const ROOM_PX = 930;
 
+/** The same on smaller screens, by what stands beside the body there. */
+const roomPx = (): number =>
+  Math.min(ROOM_PX, innerWidth - (innerWidth < 700 ? 42 : 200) - 2 * DECK_MARGIN_PX);
+
 const bar = (scale: Scale, widthPx: number): Element =>
   toDom(
     sheet(widthPx, 30, `Scale 1 to ${String(scale)}`, [
@@ -48,7 +52,7 @@ export function deckField(graph: Graph, store: StudyStore): HTMLElement {
         const most = Math.max(
           ...[widths, drawnWidths(deck, 'ultimate')].map((all) => all.reduce((sum, one) => sum + one, 0)),
         );
-        const scale = largestScale(most, ROOM_PX);
+        const scale = largestScale(most, roomPx());
         const strips = deck.map(({ kind }, i) => ({ kind, widthM: widths[i]! }));
         const piece = deckStrips({
           strips,
@@ -70,6 +74,15 @@ export function deckField(graph: Graph, store: StudyStore): HTMLElement {
         before = brief;
         sayIn(told, problems.map(problemBeside).join(' '));
       });
+      const resized = new AbortController();
+      addEventListener(
+        'resize',
+        () => {
+          if (!drawn.isConnected) return resized.abort();
+          if (before !== undefined) draw(before);
+        },
+        { signal: resized.signal },
+      );
       return h(
         'div',
         { class: 'deck-field' },
