@@ -61,7 +61,14 @@ export function demandAt(
   const loads = resultantAt(combo, undersideM);
   if (task.backfill === null) {
     const cover = (plan - shaftPlan) * coverM * soilOver(task.waterLevelM, topM);
-    return { ...loads, verticalKN: loads.verticalKN + own + cover };
+    // Field by field: this is asked for at every size tried, and a copied record costs more than the sums in it.
+    return {
+      verticalKN: loads.verticalKN + own + cover,
+      alongKN: loads.alongKN,
+      acrossKN: loads.acrossKN,
+      momentAlongKNm: loads.momentAlongKNm,
+      momentAcrossKNm: loads.momentAcrossKNm,
+    };
   }
   const { topLevelM, widthM: wallM, heelShare, inLoads } = task.backfill;
   const outside = Math.max(0, lengthM - task.shaftLengthM);
