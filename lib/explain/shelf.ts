@@ -2,6 +2,7 @@ import adjacentBox from '../../data/forms/adjacent-box.json';
 import cableStayed from '../../data/forms/cable-stayed.json';
 import compositeBox from '../../data/forms/composite-box.json';
 import compositeI from '../../data/forms/composite-i.json';
+import cantileverBox from '../../data/forms/cantilever-box.json';
 import concreteBox from '../../data/forms/concrete-box.json';
 import erection from '../../data/erection.json';
 import fatigue from '../../data/forms/fatigue.json';
@@ -48,6 +49,7 @@ const files: Readonly<Record<string, unknown>> = {
   fatigue,
   'composite-i': compositeI,
   'composite-box': compositeBox,
+  'cantilever-box': cantileverBox,
   'concrete-box': concreteBox,
   'portal-frame': portalFrame,
   'precast-i': precastI,

@@ -168,10 +168,15 @@ export const variants = (): Context =>
       ultimateWidthM: widthM,
     });
     const supportsM = [startM, startM + 0.28 * (endM - startM), startM + 0.72 * (endM - startM), endM];
-    const kept = (number: number, form: 'composite-i' | 'concrete-box', variant: Variant): KeptOption => ({
+    const methods = {
+      'composite-i': 'crane',
+      'concrete-box': 'falsework',
+      'cantilever-box': 'balanced-cantilever',
+    } as const;
+    const kept = (number: number, form: keyof typeof methods, variant: Variant): KeptOption => ({
       number,
       form,
-      method: form === 'composite-i' ? 'crane' : 'falsework',
+      method: methods[form],
       units: [{ form, role: 'main', supportsM }],
       depthM: null,
       variant,
@@ -193,11 +198,12 @@ export const variants = (): Context =>
       options: {
         ...options,
         forms: ['composite-i'],
-        workOutAnyway: ['composite-i', 'concrete-box'],
+        workOutAnyway: ['composite-i', 'concrete-box', 'cantilever-box'],
         kept: [
           kept(40, 'composite-i', { haunchRatio: 1.6, substringers: true }),
           kept(41, 'concrete-box', { transverse: true }),
           kept(42, 'concrete-box', { struts: true }),
+          kept(43, 'cantilever-box', { struts: true }),
         ],
       },
     };

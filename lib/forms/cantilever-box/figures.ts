@@ -3,6 +3,7 @@ import { formManual } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { acrossFigures } from '../concrete-box/acrossFigures.ts';
 import { strutFigures } from '../concrete-box/strutFigures.ts';
+import { cantileverCheckFigures } from './checkFigures.ts';
 import { stages, tendons, type Row } from './stageFigures.ts';
 
 const manual = formManual('cantilever-box');
@@ -109,6 +110,7 @@ const section: readonly Row[] = [
 /** Cantilevered box: section, stages, tendons, and the checks of its top slab. */
 export const cantileverFigures: readonly Descriptor[] = [
   ...[...section, ...stages, ...tendons].map((row) => sized(...row)),
+  ...cantileverCheckFigures,
   ...slabCheckFigures(manual, 'topSlabMidM'),
   ...acrossFigures(manual),
   ...strutFigures(manual),
