@@ -70,6 +70,7 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
         return read(form, governing, ({ perM }) => perM[k]! + within * (perM[k + 1]! - perM[k]!));
       },
       endWorksAs: (form, governingM) => read(form, governingM, (row) => row.endWorksAs),
+      aloneWorksAs: (form, governingM) => read(form, governingM, (row) => row.aloneWorksAs),
       depthM: (form, governingM) => read(form, governingM, (row) => row.depthM),
       unitFixed: (form, governingM, pylons = 0) =>
         read(form, governingM, (row) => row.fixed[Math.min(pylons, row.fixed.length - 1)]!),

@@ -14,6 +14,8 @@ export interface DeckLoads {
 const INNER = 5;
 /** Lengths of an end span over an inner one that are tried; in between moments are read off straight lines. */
 const RATIOS = [0.7, 0.75, 0.775, 0.8, 0.825, 0.85, 0.875, 0.9, 0.95, 1] as const;
+/** End spans of 0.8 disturb the inner ones least. */
+const CALM = RATIOS.indexOf(0.8);
 /** Places a span: the greatest moment between two of them is at most 0.1 % greater. */
 const PLACES = 36;
 
@@ -66,15 +68,29 @@ function trial(ratio: number): Trial {
 
 const trials: (Trial | undefined)[] = [];
 
+const momentOf = ({ simpleKNm, continuousKNm, trafficKNm }: DeckLoads, place: Place): number =>
+  simpleKNm * place.simple + continuousKNm * place.whole + trafficKNm * place.adverse;
+
+/**
+ * How many times as long as itself the inner span is that a span standing alone works like: at that ratio its w l^2 / 8 is
+ * the sagging of an inner span far from the ends. 1 or more, about 1.4 to 1.5 for a girder that is continuous for all its
+ * weight, near 1 for beams that are joined after they have been placed.
+ */
+export function aloneSpanWork(loads: DeckLoads): number {
+  const { simpleKNm, continuousKNm, trafficKNm } = loads;
+  const { innerSpan } = (trials[CALM] ??= trial(RATIOS[CALM]!));
+  const sagging = Math.max(...innerSpan.map((place) => momentOf(loads, place)));
+  return Math.max(1, Math.sqrt((simpleKNm + continuousKNm + trafficKNm) / 8 / sagging));
+}
+
 /**
  * How many times as long as itself the inner span is that an end span of a continuous girder works like: at that ratio
  * the greater of the sagging in the end span and the hogging over the first pier, each over what an inner span far from the
  * ends has, is 1. Moments by the line beam under even loads, traffic where it is adverse; 1 or more, about 1.2 to 1.3 for a
  * girder that is continuous for all its weight.
  */
-export function endSpanWork({ simpleKNm, continuousKNm, trafficKNm }: DeckLoads): number {
-  const moment = ({ simple, whole, adverse }: Place): number =>
-    simpleKNm * simple + continuousKNm * whole + trafficKNm * adverse;
+export function endSpanWork(loads: DeckLoads): number {
+  const moment = (place: Place): number => momentOf(loads, place);
   const most = (places: readonly Place[]): number => Math.max(...places.map(moment));
   /** What an end span needs over what an inner one does; grows with its length. */
   const useAt = (i: number): number => {

@@ -20,6 +20,8 @@ export interface TrialRow {
   readonly fixed: readonly number[];
   /** How many times as long as itself the inner span is that an end span of the unit works like. */
   readonly endWorksAs: number;
+  /** The same of a span that stands alone. */
+  readonly aloneWorksAs: number;
   /** Longest side span over the main span between two pylons with which back-stays stay taut; infinite for other forms. */
   readonly tautSide: number;
   /** What a support carries for each metre of the spans beside it, permanent and traffic together, kN/m. */

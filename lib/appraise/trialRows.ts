@@ -6,7 +6,7 @@ import { meanClearance } from './meanClearance.ts';
 import { methodLines } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
 import type { Kept } from '../kept.ts';
-import { endSpanWork } from './endSpanWork.ts';
+import { aloneSpanWork, endSpanWork, type DeckLoads } from './endSpanWork.ts';
 import { openSpans } from './openSpans.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { TrialRow } from './memory.ts';
@@ -86,7 +86,8 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     { length: TABLE_SPANS },
     (_, i) => least * Math.pow(most / least, i / (TABLE_SPANS - 1)),
   );
-  const { kind } = formModule(form).pattern;
+  const { pattern } = formModule(form);
+  const { kind } = pattern;
   const hung = kind === 'pylon';
   const base = {
     form,
@@ -116,11 +117,13 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
   };
 
   const { joined } = formModule(form);
-  const endWork = (permanentKNm: number, trafficKNm: number): number => {
-    if (hung || kind === 'simple-main' || joined === 'never') return 1;
+  /** What an end span, or one alone, works like; 1 where the trial unit is what it is. */
+  const workAs = (work: (loads: DeckLoads) => number, permanentKNm: number, trafficKNm: number): number => {
+    const isOneSpan = pattern.kind === 'continuous' && pattern.mostSpans === 1;
+    if (hung || kind === 'simple-main' || isOneSpan || joined === 'never') return 1;
     // Surfacing, barriers and what else is laid on the deck come when it is whole.
     const simpleKNm = joined === 'after-placing' ? Math.max(0, permanentKNm - site.deck.superimposedKNm) : 0;
-    return endSpanWork({ simpleKNm, continuousKNm: permanentKNm - simpleKNm, trafficKNm });
+    return work({ simpleKNm, continuousKNm: permanentKNm - simpleKNm, trafficKNm });
   };
 
   const made = function* (index: number): Work<TrialRow> {
@@ -155,7 +158,8 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
       mostDepthM: range[1],
       perM,
       fixed,
-      endWorksAs: endWork(permanentKNm, trafficKNm),
+      endWorksAs: workAs(endSpanWork, permanentKNm, trafficKNm),
+      aloneWorksAs: workAs(aloneSpanWork, permanentKNm, trafficKNm),
       tautSide: double ? tautSide(double.design) : Infinity,
       loadKNm: permanentKNm + trafficKNm,
     };

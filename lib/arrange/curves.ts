@@ -29,6 +29,10 @@ export type SpanCosts = Float64Array;
 export const endWorksAs = (table: CostTable, form: FormId, governingM: number): number =>
   table.endWorksAs?.(form, governingM) ?? 1;
 
+/** Inner span, as a multiple of the one span of a unit that has no other, that this works like. */
+export const aloneWorksAs = (table: CostTable, form: FormId, governingM: number): number =>
+  table.aloneWorksAs?.(form, governingM) ?? 1;
+
 /**
  * Cost of spans of one form read off the table once per governing span; of end spans where `worksAs` is what
  * `endWorksAs` gives.

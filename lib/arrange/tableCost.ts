@@ -1,5 +1,5 @@
 import type { CostTable, FormId, Unit } from '../model/index.ts';
-import { endWorksAs, unevenCost } from './curves.ts';
+import { aloneWorksAs, endWorksAs, unevenCost } from './curves.ts';
 
 /** A support between two spans, with the form that stands on it. */
 interface Standing {
@@ -37,7 +37,7 @@ export function governingSpan(unit: Unit): number {
 
 /**
  * Cost of a row of units on the cost table, money: decks at the governing span of each unit, end spans of continuous
- * ones as the longer inner spans that they work like, fixed costs, and every
+ * ones and spans alone as the longer inner spans that they work like, fixed costs, and every
  * intermediate support, dearer in a soft zone where the table says so. Abutments are the same for every arrangement and
  * are left out. Uneven approach spans carry the preference of `unevenCost`. For ordering only.
  */
@@ -47,10 +47,12 @@ export function tableCost(units: readonly Unit[], table: CostTable): number {
     const governingM = governingSpan(unit);
     cost += table.unitFixed(unit.form, governingM, unit.pylons?.length ?? 0);
     const endWork = endWorksAs(table, unit.form, governingM);
-    const hasEnds = unit.supportsM.length > 2 && unit.pylons === undefined;
+    const isAlone = unit.supportsM.length === 2;
+    const atEnd = isAlone ? aloneWorksAs(table, unit.form, governingM) : endWork;
+    const hasEnds = unit.pylons === undefined;
     for (let i = 1; i < unit.supportsM.length; i += 1) {
       const span = unit.supportsM[i]! - unit.supportsM[i - 1]!;
-      const works = hasEnds && (i === 1 || i === unit.supportsM.length - 1) ? endWork : 1;
+      const works = hasEnds && (i === 1 || i === unit.supportsM.length - 1) ? atEnd : 1;
       cost +=
         span * table.deckPerM(unit.form, works * span, governingM) +
         unevenCost(table, unit, span, governingM);

@@ -37,9 +37,10 @@ export interface Layers {
   readonly task: UnitTask;
   readonly G: number;
   readonly K: number;
-  /** Of an inner span or of one alone, and of an end span. */
+  /** Of an inner span, of an end span and of one alone. */
   readonly cost: SpanCosts;
   readonly endCost: SpanCosts;
+  readonly aloneCost: SpanCosts;
   readonly half: HalfCosts;
   readonly room: Room;
   /** A layout dearer than this need not be followed, and what the rest of it costs at least for each metre. */

@@ -1,5 +1,5 @@
 import type { CostTable } from '../model/index.ts';
-import { endWorksAs, halfCosts, spanCostAt, spanCosts } from './curves.ts';
+import { aloneWorksAs, endWorksAs, halfCosts, spanCostAt, spanCosts } from './curves.ts';
 import { governingSpans, isFull, MORE_SPANS, mostSpans } from './governingSpans.ts';
 import { SLACK as sameShare } from './limits.ts';
 import { close, isTooDear, leastPerM, roomFor, type Layers } from './unitLayers.ts';
@@ -34,14 +34,21 @@ function lastSpan(layers: Layers, z: number, end: number): number {
 
 /** Layouts of one and two spans; fills the costs of reaching each first pier. */
 function firstTwo(layers: Layers, F: Float64Array): void {
-  const { task, G, cost, endCost, half } = layers;
+  const { task, G, aloneCost, endCost, half } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
   F.fill(Infinity);
   for (let x = 1; x < X.length && X[x]! <= G + SLACK; x += 1) {
     const s = X[x]!;
     if (s < limits.minSpacingM - SLACK) continue;
     if (x >= firstEnd && x <= lastEnd && s >= limits.minSpanM - SLACK) {
-      close(layers, 1, x, spanCostAt(cost, s) + (task.endIsPier ? half.A[x]! + half.B[x]! * s : 0), 0, 0);
+      close(
+        layers,
+        1,
+        x,
+        spanCostAt(aloneCost, s) + (task.endIsPier ? half.A[x]! + half.B[x]! * s : 0),
+        0,
+        0,
+      );
     }
     const reached = spanCostAt(endCost, s) + half.A[x]! + half.B[x]! * s;
     if (!isTooDear(layers, reached, s)) F[x] = reached;
@@ -249,6 +256,8 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
     const cost = spanCosts(table, unit, G);
     const worksAs = endWorksAs(table, task.form, G);
     const endCost = worksAs === 1 ? cost : spanCosts(table, unit, G, worksAs);
+    const alone = aloneWorksAs(table, task.form, G);
+    const aloneCost = alone === 1 ? cost : spanCosts(table, unit, G, alone);
     const half = halfCosts(
       task.supports,
       Math.max(task.limits.minSpacingM, task.limits.interiorLeast * G),
@@ -257,7 +266,19 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
     const fixed = table.unitFixed(task.form, G);
     const boundCost = worth.boundCost() - fixed;
     const restPerM = boundCost < Infinity ? leastPerM(task, G, cost, endCost, half) : 0;
-    const layers: Layers = { task, G, K, cost, endCost, half, room, boundCost, restPerM, cut: false };
+    const layers: Layers = {
+      task,
+      G,
+      K,
+      cost,
+      endCost,
+      aloneCost,
+      half,
+      room,
+      boundCost,
+      restPerM,
+      cut: false,
+    };
     room.closed.fill(Infinity, 0, (K + 1) * ends);
     firstTwo(layers, F);
     for (let j = 2; j < K; j += 1) {

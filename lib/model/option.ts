@@ -40,6 +40,8 @@ export interface CostTable {
    * `deckPerM` is asked for that length. 1 where absent.
    */
   endWorksAs?(form: FormId, governingM: number): number;
+  /** The same of the one span of a unit that has no other. 1 where absent. */
+  aloneWorksAs?(form: FormId, governingM: number): number;
   /** Structural depth at midspan, m, for a governing span. */
   depthM(form: FormId, governingM: number): number;
   /** Fixed cost of a unit of this form (pylons, set-up of its method), money; `pylons` is 0 unless given. */

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { endSpanWork } from '../../lib/appraise/endSpanWork.ts';
+import { aloneSpanWork, endSpanWork } from '../../lib/appraise/endSpanWork.ts';
 
 /**
  * Sagging in an end span and hogging over the first pier of an endless row of spans of 1 m under 1 kN/m, by the theorem of
@@ -32,6 +32,22 @@ describe('endSpanWork', () => {
     const laid = endSpanWork({ simpleKNm: 50, continuousKNm: 20, trafficKNm: 30 });
     expect(loaded).toBeLessThan(whole);
     expect(laid).toBeLessThan(loaded);
+    expect(laid).toBeGreaterThan(1);
+  });
+});
+
+describe('aloneSpanWork', () => {
+  it('aloneSpanWork({permanent}) is root 3: w l^2 / 8 alone over w l^2 / 24 far from the ends of a row', () => {
+    const alone = aloneSpanWork({ simpleKNm: 0, continuousKNm: 100, trafficKNm: 0 });
+    // The trial row is of seven spans: its middle one is within 0.5 % of an endless row.
+    expect(alone / Math.sqrt(3)).toBeCloseTo(1, 2);
+  });
+
+  it('aloneSpanWork({simple beams alone}) is 1, and falls with what the spans carry before they are joined', () => {
+    expect(aloneSpanWork({ simpleKNm: 100, continuousKNm: 0, trafficKNm: 0 })).toBeCloseTo(1, 9);
+    const whole = aloneSpanWork({ simpleKNm: 0, continuousKNm: 70, trafficKNm: 30 });
+    const laid = aloneSpanWork({ simpleKNm: 50, continuousKNm: 20, trafficKNm: 30 });
+    expect(laid).toBeLessThan(whole);
     expect(laid).toBeGreaterThan(1);
   });
 });

@@ -13,11 +13,12 @@ const rates: Readonly<Partial<Record<FormId, readonly [a: number, b: number, fix
   'cable-stayed': [150, 4, 150],
 };
 
-function tableFor({ phase, endWorksAs = 1 }: Case): CostTable {
+function tableFor({ phase, endWorksAs = 1, aloneWorksAs = 1 }: Case): CostTable {
   const rate = (form: FormId): readonly [number, number, number] => rates[form]!;
   return {
     deckPerM: (form, span, governing) => rate(form)[0] + rate(form)[1] * (0.7 * governing + 0.3 * span),
     endWorksAs: (form) => (form === 'composite-i' ? endWorksAs : 1),
+    aloneWorksAs: (form) => (form === 'composite-i' ? aloneWorksAs : 1),
     depthM: () => 1,
     unitFixed: (form, _, pylons = 0) => rate(form)[2] * Math.max(pylons, 1),
     support: (_, x, left, right) => 220 + 90 * Math.sin(x / 3 + phase) + 6 * (left + right),
@@ -30,6 +31,8 @@ interface Case {
   readonly phase: number;
   /** Inner span that an end span of a continuous unit works like; itself unless given. */
   readonly endWorksAs?: number;
+  /** The same of a span that stands alone. */
+  readonly aloneWorksAs?: number;
 }
 
 const cases: readonly Case[] = [
@@ -68,7 +71,7 @@ const cases: readonly Case[] = [
     phase: 4,
     endWorksAs: 1.25,
   },
-  { lengthM: 36, hard: [[14, 22]], phase: 5, endWorksAs: 1.2 },
+  { lengthM: 36, hard: [[14, 22]], phase: 5, endWorksAs: 1.2, aloneWorksAs: 1.45 },
 ];
 
 const halfM = 0.5;
@@ -124,7 +127,11 @@ function unitCost(table: CostTable, form: FormId, row: readonly number[], pylons
   const governing = Math.max(...spans);
   const hasEnds = spans.length > 1 && pylons === 0;
   const works = (i: number): number =>
-    hasEnds && (i === 0 || i === spans.length - 1) ? table.endWorksAs!(form, governing) : 1;
+    spans.length === 1 && pylons === 0
+      ? table.aloneWorksAs!(form, governing)
+      : hasEnds && (i === 0 || i === spans.length - 1)
+        ? table.endWorksAs!(form, governing)
+        : 1;
   return spans.reduce(
     (sum, s, i) => sum + s * table.deckPerM(form, works(i) * s, governing),
     table.unitFixed(form, governing, pylons),
