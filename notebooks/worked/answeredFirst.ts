@@ -9,9 +9,17 @@ export async function answerOf(example: ExampleName): Promise<Appraisal | null> 
   return response.ok ? readAnswer(await response.text()) : null;
 }
 
-/** The page is drawn before the workers begin to work out what it shows already, ms. */
-const AFTER_MS = 1000;
-const whenDrawn = (work: () => void): void => void setTimeout(work, AFTER_MS);
+/** Signs that somebody is about to change something. */
+const SIGNS = ['pointermove', 'pointerdown', 'keydown', 'wheel', 'focusin'] as const;
+
+/** Does some work once at the first sign of a hand: a page that is only looked at, or lies open unseen, works nothing out. */
+function atFirstSign(work: () => void): void {
+  const once = (): void => {
+    for (const sign of SIGNS) removeEventListener(sign, once);
+    work();
+  };
+  for (const sign of SIGNS) addEventListener(sign, once, { passive: true });
+}
 
 /**
  * The same appraiser, which gives the answer that came with the pages to the first study it is asked, if that is the study
@@ -21,7 +29,7 @@ const whenDrawn = (work: () => void): void => void setTimeout(work, AFTER_MS);
 export function answeredFirst(
   workers: Appraiser,
   came: Promise<Appraisal | null>,
-  later: (work: () => void) => void = whenDrawn,
+  later: (work: () => void) => void = atFirstSign,
 ): Appraiser {
   let isFirst = true;
   const other = new AbortController();

@@ -216,7 +216,9 @@ try {
     await page.waitForFunction(() => (window as unknown as Watched).watched.first > 0);
     const first = await page.evaluate(() => (window as unknown as Watched).watched.first);
     console.log(`${example}: first stack ${first.toFixed(0)} ms after opening`);
-    await page.waitForTimeout(2000);
+    // The workers begin at the first sign of a hand.
+    await page.mouse.move(700, 400);
+    await page.waitForTimeout(4000);
     for (const grip of grips) {
       const dragged = await drag(page, grip);
       if (dragged === null) {

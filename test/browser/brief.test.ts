@@ -39,23 +39,25 @@ const paste = (page: Page, text: string): Promise<void> =>
     const event = new ClipboardEvent('paste', { clipboardData, bubbles: true, cancelable: true });
     document.activeElement?.dispatchEvent(event);
   }, text);
+/** Waits until the prose has some words. */
+const reads = (page: Page, words: string): Promise<void> => expect.poll(() => prose(page)).toContain(words);
 const focused = (page: Page): Promise<string | null | undefined> =>
   page.evaluate(() => document.activeElement?.getAttribute('aria-label'));
 
 describe('the brief in prose', () => {
   it('reads as it stands, and follows a choice, an unknown and its undoing', async () => {
-    expect(await prose(page)).toContain('from chainage 1240 to 1470, on a straight line, 8° off square.');
+    await reads(page, 'from chainage 1240 to 1470, on a straight line, 8° off square.');
     await field(page, 'line in plan').selectOption('curve');
     await type(page, 'plan radius, m', '400');
-    expect(await prose(page)).toContain('on a curve of radius 400 m, 8° off square.');
+    await reads(page, 'on a curve of radius 400 m, 8° off square.');
     await type(page, 'flood level, m', '?');
     await page.locator('h1').click();
-    expect(await prose(page)).toContain('floods to an unknown level; the soffit');
+    await reads(page, 'floods to an unknown level; the soffit');
     await undo(page);
-    expect(await prose(page)).toContain('floods to 10.90 once in 100 years; the soffit');
+    await reads(page, 'floods to 10.90 once in 100 years; the soffit');
     await undo(page);
     await undo(page);
-    expect(await prose(page)).toContain('on a straight line, 8° off square.');
+    await reads(page, 'on a straight line, 8° off square.');
   });
 
   it('Enter on a preset headroom confirms it, and the caution goes', async () => {
@@ -78,7 +80,7 @@ describe('the brief in prose', () => {
     );
     await type(page, 'budget, MEUR', '8.5');
     await page.locator('h1').click();
-    expect(await prose(page)).toContain('The budget is 8.50 million EUR at 2026 Q1 prices, for: Bridge');
+    await reads(page, 'The budget is 8.50 million EUR at 2026 Q1 prices, for: Bridge');
   });
 });
 
@@ -94,7 +96,7 @@ describe('obstacles', () => {
     await field(page, 'obstacle 4, supports').selectOption('hard');
     await field(page, 'envelope over obstacle 4').selectOption('preset');
     expect(await field(page, 'obstacle 4, headroom, m').textContent()).toBe('5.00');
-    expect(await prose(page)).toContain('No support may stand on Mill lane between 1425.0 and 1433.0, where');
+    await reads(page, 'No support may stand on Mill lane between 1425.0 and 1433.0, where');
     await page.waitForFunction(() =>
       document.querySelector('[id="1+020"] svg')?.textContent.includes('Mill lane'),
     );
@@ -170,11 +172,11 @@ describe('the deck', () => {
     expect(await overall()).toEqual(['12.75']);
     expect(await field(page, 'ultimate width of strip 3, m').textContent()).toBe('3.75');
     await field(page, 'kind of strip 7').selectOption('verge');
-    expect(await prose(page)).toContain('A road of 2 lanes has to cross');
+    await reads(page, 'A road of 2 lanes has to cross');
     await page.getByRole('button', { name: 'add a strip after strip 4' }).focus();
     await page.keyboard.press('Enter');
     expect((await kinds()).join(' ')).toBe('barrier shoulder lane lane lane shoulder barrier verge parapet');
-    expect(await prose(page)).toContain('A road of 3 lanes');
+    await reads(page, 'A road of 3 lanes');
     await page.getByRole('button', { name: 'take out strip 9' }).focus();
     await page.keyboard.press('Enter');
     expect(await focused(page)).toBe('take out strip 8');

@@ -1,7 +1,7 @@
 import type { Page } from 'playwright-core';
 import { beforeAll, describe, expect, it } from 'vitest';
 import example from '../../data/examples/low-ferry.json' with { type: 'json' };
-import { oneStudyPage, settled } from './studyPage.ts';
+import { middleOf, oneStudyPage, settled } from './studyPage.ts';
 
 const study = oneStudyPage();
 let page: Page;
@@ -25,10 +25,7 @@ const undoIs = (what: string): Promise<unknown> =>
 
 /** Takes a handle with the mouse and moves it, without letting go. */
 async function pull(key: string, dx: number, dy: number, cell = CROSSING): Promise<void> {
-  const grip = handle(key, cell).locator('.grip');
-  await grip.scrollIntoViewIfNeeded();
-  const box = (await grip.boundingBox())!;
-  const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+  const [x, y] = await middleOf(handle(key, cell).locator('.grip'));
   await page.mouse.move(x, y);
   await page.mouse.down();
   for (let step = 1; step <= 4; step += 1) await page.mouse.move(x + (dx * step) / 4, y + (dy * step) / 4);

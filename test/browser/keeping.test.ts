@@ -1,6 +1,7 @@
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { openSite, type Heard, type Site } from './site.ts';
+import { middleOf } from './studyPage.ts';
 
 let site: Site;
 let page: Page;
@@ -49,11 +50,10 @@ describe('a study on the device', () => {
 
   it('is not lost when the tab is killed while a pier is in hand', async () => {
     const grip = page.locator('[id="1+020"] [data-handle="pier/1"] .grip');
-    await grip.scrollIntoViewIfNeeded();
-    const box = (await grip.boundingBox())!;
-    await page.mouse.move(box.x + 13, box.y + 13);
+    const [x, y] = await middleOf(grip);
+    await page.mouse.move(x, y);
     await page.mouse.down();
-    await page.mouse.move(box.x + 33, box.y + 13, { steps: 4 });
+    await page.mouse.move(x + 20, y, { steps: 4 });
     const value = (): Promise<string | null> =>
       page.locator('[id="1+020"] [data-handle="pier/1"]').getAttribute('aria-valuenow');
     await page.waitForTimeout(400);

@@ -1,6 +1,6 @@
 import { beforeAll, describe, expect, it } from 'vitest';
 import type { Page } from 'playwright-core';
-import { oneStudyPage, settled } from './studyPage.ts';
+import { middleOf, oneStudyPage, settled } from './studyPage.ts';
 
 const study = oneStudyPage();
 let page: Page;
@@ -16,10 +16,7 @@ const ranking = (): Promise<string[]> =>
 
 /** Takes hold of the figure of a name and moves it, without letting go. */
 async function pull(name: string, byPx: number): Promise<void> {
-  const field = page.locator(`[role=spinbutton][aria-label^="${name},"]`).first();
-  await field.scrollIntoViewIfNeeded();
-  const box = (await field.boundingBox())!;
-  const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+  const [x, y] = await middleOf(page.locator(`[role=spinbutton][aria-label^="${name},"]`).first());
   await page.mouse.move(x, y);
   await page.mouse.down();
   for (let step = 1; step <= 4; step += 1) await page.mouse.move(x + (byPx * step) / 4, y);

@@ -1,4 +1,4 @@
-import type { Page } from 'playwright-core';
+import type { Locator, Page } from 'playwright-core';
 import { afterAll, afterEach, beforeAll, expect } from 'vitest';
 import { openSite, type Heard, type Site } from './site.ts';
 
@@ -10,10 +10,28 @@ export async function settled(page: Page): Promise<void> {
   await page.waitForSelector('[data-option]', { timeout: 60_000 });
   await page.waitForTimeout(SAYS_SO_MS);
   await page.waitForFunction(
-    () => [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
+    // Once all has been drawn, what is off the screen is not laid out any more.
+    () =>
+      document.querySelector('.skips') !== null &&
+      [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
     undefined,
     { timeout: 60_000 },
   );
+}
+
+/** From one look at a place to the next, ms. */
+const LOOK_MS = 100;
+
+/** Middle of an element on the screen, px, once it stands still: what comes on the screen is laid out only then. */
+export async function middleOf(element: Locator): Promise<readonly [x: number, y: number]> {
+  await element.scrollIntoViewIfNeeded();
+  for (let before = ''; ;) {
+    const { x, y, width, height } = (await element.boundingBox())!;
+    const now = [x, y, width, height].join();
+    if (now === before) return [x + width / 2, y + height / 2];
+    before = now;
+    await element.page().waitForTimeout(LOOK_MS);
+  }
 }
 
 /** Takes back every change on the page, whatever still holds the focus. */
