@@ -1,12 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { ratesFor, type Appraisal, type Study } from '../../lib/index.ts';
-import { workedExample, type ExampleName } from '../../notebooks/examples.ts';
 import { answerTo } from './answerTo.ts';
+import { exampleStudy as study } from './workedOut.ts';
 
-const study = (name: ExampleName): Study => {
-  const whole = workedExample(name);
-  return { ...whole, books: { ...whole.books, draws: 1000 } };
-};
 /** A study with one item at the 90 % point of its own rate: dear, and inside what was stated. */
 const dear =
   (item: string) =>
