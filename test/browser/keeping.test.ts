@@ -45,7 +45,7 @@ describe('a study on the device', () => {
     await page.reload();
     await standing(page);
     expect(await shown(page, 'no-pier width')).toBe('64.0');
-    await says(page, 'saved');
+    await allSaved(page);
   });
 
   it('is not lost when the tab is killed while a pier is in hand', async () => {
