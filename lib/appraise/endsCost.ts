@@ -1,7 +1,7 @@
 import { remembered } from '../kept.ts';
 import type { Arrangement, Unit } from '../model/index.ts';
 import { constructionDepth, roadLevelAt, type DepthAlong } from '../site/index.ts';
-import { askUnderEnd, expectedLines, placeText, standOneSupport } from '../substructure/index.ts';
+import { expectedLines, placeText, standOneSupport, trialAsk } from '../substructure/index.ts';
 import { approachLines, furnitureLines } from '../takeoff/index.ts';
 import { profileOrNearest } from './profileOrNearest.ts';
 import { PIER_PERMANENT } from './trialPiers.ts';
@@ -29,12 +29,10 @@ export function endsCost(bench: Workbench, asked: FormAndMethod, { units }: Arra
   const road = profileOrNearest(site, along);
   const abutment = (unit: Unit, depthM: number, chainageM: number, spanM: number): number => {
     const loadKNm = tables.loadKNm(asked, unit.form, longest(unit));
-    const ask = askUnderEnd(
+    const ask = trialAsk(
       site,
       { permanentKNm: PIER_PERMANENT * loadKNm, trafficKNm: (1 - PIER_PERMANENT) * loadKNm, depthM },
-      chainageM,
-      spanM,
-      roadLevelAt(road, chainageM),
+      { kind: 'abutment', chainageM, roadLevelM: roadLevelAt(road, chainageM), lengthM: spanM / 2 },
     );
     const key = `${placeText(site, chainageM)} ${JSON.stringify(ask)} ${bench.booksKey}`;
     return costOf(

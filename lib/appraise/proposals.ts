@@ -41,9 +41,10 @@ export function outBecause({ study, site }: Workbench, form: FormId): readonly s
 }
 
 /**
- * Searches a form, unless the rules put it out, by its usual method, and by the next one where the rules warn of the first. The cheapest of each
- * method and of each set of forms is proposed first, as the table tells those apart least surely, then the next best of
- * all, three at most; the rest is counted by reason. Pauses while the table is laid, and between the searches.
+ * Searches a form, unless the rules put it out, by its usual method, and by the next one where the rules warn of the
+ * first. The cheapest of each method and of each set of forms is proposed first, as the table tells those apart least
+ * surely, then the next best of all, three at most; the rest is counted by reason. Pauses while the table is laid, and
+ * between the searches.
  */
 export function* proposalsFor(bench: Workbench, form: FormId): Work<Proposals> {
   const out = outBecause(bench, form);

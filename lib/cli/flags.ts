@@ -22,14 +22,15 @@ function joined(words: readonly string[]): string[] {
  *
  * @param names the flags there are
  * @param argv the command line after the name of the command
- * @throws Refusal where a flag is not known or has no value
+ * @param takesWords whether words without a flag may stand among them
+ * @throws Refusal where a flag is not known or has no value, or where a word may not stand
  */
-export function readFlags(names: readonly string[], argv: readonly string[]): Flags {
+export function readFlags(names: readonly string[], argv: readonly string[], takesWords = false): Flags {
   try {
     const { values, positionals } = parseArgs({
       args: joined(argv),
       options: Object.fromEntries(names.map((name) => [name, { type: 'string' as const }])),
-      allowPositionals: true,
+      allowPositionals: takesWords,
     });
     return { values, rest: positionals };
   } catch (error) {

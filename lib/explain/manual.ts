@@ -30,6 +30,7 @@ import { windowFigures } from '../rules/figures.ts';
 import { deckFigures } from '../site/deckFigures.ts';
 import { siteFigures } from '../site/figures.ts';
 import { studyFigures } from '../study/figures.ts';
+import { alongFigures } from '../substructure/alongFigures.ts';
 import { articulationFigures } from '../substructure/articulationFigures.ts';
 import { footLineFigures } from '../substructure/footLineFigures.ts';
 import { foundationFigures } from '../substructure/foundationFigures.ts';
@@ -74,6 +75,7 @@ export const manual: readonly Descriptor[] = [
   ...integralFigures,
   ...supportFigures,
   ...articulationFigures,
+  ...alongFigures,
   ...shaftFigures,
   ...foundationFigures,
   ...wallLineFigures,

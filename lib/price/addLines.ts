@@ -20,8 +20,7 @@ type Four<T> = [T, T, T, T];
 export function addLines({ to: T, factor, draws, quantities, rates }: Sum, from: number, to: number): void {
   const first = draws && placeOf(draws, from);
   const last = draws && placeOf(draws, to);
-  let at = 0;
-  for (; at + 1 < rates.length; at += TOGETHER) {
+  for (let at = 0; at < rates.length; at += TOGETHER) {
     const some = rates.slice(at, at + TOGETHER);
     const of = quantities.slice(at, at + TOGETHER);
     // What is short of four is filled up with nothing.
@@ -31,25 +30,6 @@ export function addLines({ to: T, factor, draws, quantities, rates }: Sum, from:
     }
     if (draws) addIn(T, factor, draws, of as Four<number>, some as Four<Float64Array>, first!, last!);
     else addAll(T, factor, of as Four<number>, some as Four<Float64Array>, from, to);
-  }
-  if (at >= rates.length) return;
-  const [a, A] = [quantities[at]!, rates[at]!];
-  if (draws) addOneIn(T, factor, draws, a, A, first!, last!);
-  else for (let k = from; k < to; k++) T[k] = T[k]! + factor[k]! * a * A[k]!;
-}
-
-function addOneIn(
-  T: Float64Array,
-  factor: Float64Array,
-  draws: Uint32Array,
-  a: number,
-  A: Float64Array,
-  first: number,
-  last: number,
-): void {
-  for (let i = first; i < last; i++) {
-    const k = draws[i]!;
-    T[k] = T[k]! + factor[k]! * a * A[k]!;
   }
 }
 

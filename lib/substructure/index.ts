@@ -1,5 +1,5 @@
-export { deckOnSupport, standPierBetween, type DeckOnSupport } from './standPierBetween.ts';
-export { askUnderEnd } from './askUnderEnd.ts';
+export { deckOnSupport, standPierBetween } from './standPierBetween.ts';
+export { trialAsk, type DeckOnSupport } from './trialAsk.ts';
 export { settingAt, type Setting } from './setting.ts';
 export { placeText } from './placeText.ts';
 export { standOneSupport } from './standOneSupport.ts';

@@ -1,14 +1,13 @@
 import type { Site } from '../model/index.ts';
 import { substructureData } from './data.ts';
 import { settingAt } from './setting.ts';
+import { gyration } from './sizeShaft.ts';
 
 /** Whether a pier at a chainage is a leaf because water reaches it or traffic may strike it. */
 export function leafAt(site: Site, chainageM: number): boolean {
   const { floodDepthM, impact } = settingAt(site, chainageM);
   return floodDepthM > 0 || impact !== null;
 }
-
-const SQRT_12 = Math.sqrt(12);
 
 /**
  * Stiffness of a pier against its top moving along the road, kN per m: 3 E I / h^3 of a cantilever from a rigid foundation,
@@ -20,8 +19,7 @@ export function pierStiffness(deckWidthM: number, heightM: number, isLeaf: boole
   const isHollow = heightM > pier.hollowAboveM;
   const isOne = isLeaf || isHollow;
   const widthM = Math.max(pier.leastLeafWidthM, pier.leafWidthShare * deckWidthM);
-  const perThickness = isHollow ? 0.4 : 1 / SQRT_12;
-  const slender = (pier.effectiveLength * heightM) / (perThickness * pier.slenderness);
+  const slender = (pier.effectiveLength * heightM) / (gyration(isHollow) * pier.slenderness);
   const steps = Math.ceil(slender / pier.stepM - 1e-9);
   const t = Math.max(isOne ? pier.leastLeafM : pier.leastColumnM, steps * pier.stepM);
   const inner = isHollow ? [Math.max(0, widthM - 2 * pier.wallM), Math.max(0, t - 2 * pier.wallM)] : [0, 0];

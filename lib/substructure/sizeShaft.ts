@@ -51,6 +51,9 @@ export function sizeShaft(task: ShaftTask): PierShaft {
   };
 }
 
+/** Radius of gyration over thickness: 1 / sqrt(12) of a solid shaft, about 0.4 of a thin hollow wall. */
+export const gyration = (hollow: boolean): number => (hollow ? 0.4 : 1 / Math.sqrt(12));
+
 /** Concrete area of one shaft or column, m2. */
 export function sectionArea(lengthM: number, widthM: number, hollow: boolean): number {
   if (!hollow) return lengthM * widthM;
@@ -65,9 +68,7 @@ function passes(task: ShaftTask, t: number, width: number, columns: number, holl
   const ownKN = area * columns * task.heightM * concrete.weightKNm3;
   const axial = (task.designVerticalKN + factors.permanent * ownKN) / (area * columns * fcdKPa);
   if (axial > pier.axialShare) return false;
-  // Radius of gyration: t / sqrt(12) solid; about 0.4 t for a thin hollow wall.
-  const radius = hollow ? 0.4 * t : t / Math.sqrt(12);
-  if ((pier.effectiveLength * task.heightM) / radius > pier.slenderness) return false;
+  if ((pier.effectiveLength * task.heightM) / (gyration(hollow) * t) > pier.slenderness) return false;
   const ratio = hollow ? pier.hollowBarsKgM3 : columns === 1 ? pier.leafBarsKgM3 : pier.columnBarsKgM3;
   const steelM2 = (area * ratio * pier.verticalShare) / steelKgM3;
   const normalKN = Math.max(0, task.permanentKN + ownKN) / columns;

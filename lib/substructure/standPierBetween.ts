@@ -1,15 +1,6 @@
 import type { Design, Site, Support } from '../model/index.ts';
-import { constructionDepth } from '../site/index.ts';
-import { substructureData } from './data.ts';
-import { windOnDeck } from './loads.ts';
 import { standOneSupport } from './standOneSupport.ts';
-
-/** Reactions of a deck per metre of the spans beside a support, kN/m, with its depth over the support, m. */
-export interface DeckOnSupport {
-  readonly permanentKNm: number;
-  readonly trafficKNm: number;
-  readonly depthM: number;
-}
+import { trialAsk, type DeckOnSupport } from './trialAsk.ts';
 
 /**
  * Reactions per metre of neighbouring half-spans from a sized unit: the heaviest interior support, or the end supports of a
@@ -48,23 +39,8 @@ export function standPierBetween(
   spanRightM: number,
   roadLevelM: number,
 ): Support {
-  const length = (spanLeftM + spanRightM) / 2;
-  const permanentKN = deck.permanentKNm * length;
-  return standOneSupport(site, {
-    name: 'pier',
-    kind: 'pier',
-    chainageM,
-    roadLevelM,
-    soffitLevelM: roadLevelM - constructionDepth(site.deck, deck.depthM),
-    permanentKN,
-    trafficKN: deck.trafficKNm * length,
-    trafficLeastKN: 0,
-    alongKN: substructureData.friction.coefficient * permanentKN,
-    acrossKN: windOnDeck(deck.depthM, length),
-    fixed: false,
-    heldAlongKN: 0,
-    bearingMovementMm: 0,
-    bearings: substructureData.bearings.perLine,
-    jointMovementMm: 0,
-  });
+  return standOneSupport(
+    site,
+    trialAsk(site, deck, { kind: 'pier', chainageM, roadLevelM, lengthM: (spanLeftM + spanRightM) / 2 }),
+  );
 }

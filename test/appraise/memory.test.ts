@@ -34,7 +34,7 @@ describe('kept', () => {
 describe('memory', () => {
   // A form that stands alone and one with approaches keep everything that can be kept.
   const whole = lowFerry();
-  const study: Study = { ...whole, options: { ...whole.options, forms: ['composite-i', 'truss'] } };
+  const study: Study = { ...whole, options: { ...whole.options, forms: ['composite-i', 'cable-stayed'] } };
   const { fromM, toM } = riverOf(study);
   const other: Study = {
     ...study,

@@ -45,7 +45,11 @@ describe('a study on the device', () => {
     await page.reload();
     await standing(page);
     expect(await shown(page, 'no-pier width')).toBe('64.0');
+    // Saved on leaving or after: the journal is empty, and the study on the device has it.
     await allSaved(page);
+    await page.reload();
+    await standing(page);
+    expect(await shown(page, 'no-pier width')).toBe('64.0');
   });
 
   it('is not lost when the tab is killed while a pier is in hand', async () => {

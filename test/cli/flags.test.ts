@@ -35,6 +35,7 @@ describe('flags of the command line', () => {
     ['--span=-3', 'too-small'],
     ['--span 0', 'too-small'],
     ['--span 3001', 'too-large-value'],
+    ['--span 3 120', 'unknown-key'],
     ['--span 3 --widht 4', 'unknown-key'],
     ['--span 3 --toString 4', 'unknown-key'],
   ])('"%s" is refused as %s', (line, code) => {

@@ -116,8 +116,10 @@ describe('figure', () => {
       'data/substructure',
       'standing/odds/1/1',
       'standing/odds/998/999',
-    ])
+    ]) {
+      expect(() => figure(example(), path), path).toThrow(RangeError);
       expect(() => figure(example(), path), path).toThrow(/: expected .+, received '/);
+    }
     expect(() => ask('site/depthM')).toThrow("path: expected a figure of the study, received 'site/depthM'");
   });
 

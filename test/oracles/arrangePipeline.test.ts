@@ -13,7 +13,7 @@ import type { FormId, MethodId } from '../../lib/model/index.ts';
 import { expectedLines } from '../../lib/substructure/index.ts';
 import { lowFerry } from '../appraise/studies.ts';
 
-const GRID_M = 6;
+const GRID_M = 5;
 
 /** Cost of the whole crossing at mean rates, worked out by every stage. */
 function fullCost(bench: Workbench, form: FormId, method: MethodId, supportsM: readonly number[]): number {
@@ -58,7 +58,7 @@ describe('proposals against brute force through the whole pipeline', { timeout: 
   it.each<[FormId, number]>([
     ['composite-i', 110],
     ['concrete-box', 83],
-  ])('nothing on a grid of 6 m is cheaper than the best proposal of %s', (form, mostM) => {
+  ])('nothing on a grid of 5 m is cheaper than the best proposal of %s', (form, mostM) => {
     const bench = workbench(lowFerry());
     const { arrangements } = finish(proposalsFor(bench, form));
     const { method } = arrangements[0]!;

@@ -186,9 +186,9 @@ describe('arrange on random crossings', () => {
           found += expectLawful({ site: standBetween(windowed, startM, endM), table, request });
         },
       ),
-      { seed: 20260112, numRuns: 1200 },
+      { seed: 20260112, numRuns: 3000 },
     );
-    expect(found).toBeGreaterThan(1200);
-    expect(moved).toBeGreaterThan(400);
+    expect(found).toBeGreaterThan(3000);
+    expect(moved).toBeGreaterThan(1000);
   }, 120_000);
 });

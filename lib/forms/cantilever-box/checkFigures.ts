@@ -1,11 +1,19 @@
 import type { Descriptor } from '../../model/index.ts';
 import { formManual } from '../common/formManual.ts';
+import { anyBoxFigures } from '../concrete-box/anyBoxFigures.ts';
 
-const { check } = formManual('cantilever-box');
+const manual = formManual('cantilever-box');
+const { check } = manual;
 const weight = ['span*OwnKNm', 'span*OpenKNm', 'pier*OwnKNm', 'pier*OpenKNm'] as const;
 const traffic = ['span*TrafficKNm', 'pier*TrafficKNm'] as const;
 const pierSection = ['pierAreaM2', 'pierInertiaM4', 'pierCentroidFromTopM'] as const;
 const midSection = ['areaM2', 'inertiaM4', 'centroidFromTopM'] as const;
+const overPier = [
+  'strands over the pier at their design strength x lever to the bottom slab',
+  'topStrandCount',
+  './depthM/support',
+  'bottomSlabAtPiersM',
+] as const;
 const strength = 'data/materials/concreteDefaultMPa/:standard/box';
 
 /** Limit states of a haunched concrete box. */
@@ -14,12 +22,7 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
   ...check(
     'stage-bending',
     ['gamma G moment of a free arm with its traveller', 'pier*CantileverKNm', 'travellerKN'],
-    [
-      'strands over the pier at their design strength x lever to the bottom slab',
-      'topStrandCount',
-      './depthM/support',
-      'bottomSlabAtPiersM',
-    ],
+    overPier,
     'EN 1992-1-1 6.1 (from memory)',
   ),
   ...check(
@@ -30,12 +33,7 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
       ...traffic,
       'span*ParasiticKNm',
     ],
-    [
-      'strands over the pier at their design strength x lever to the bottom slab',
-      'topStrandCount',
-      './depthM/support',
-      'bottomSlabAtPiersM',
-    ],
+    overPier,
     'EN 1992-1-1 6.1 (from memory)',
   ),
   ...check(
@@ -117,18 +115,6 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
     'EN 1992-1-1 6.2.3, 6.3.2 (from memory)',
   ),
   ...check(
-    'web-stirrups',
-    [
-      'stirrups of the outer web over its section, shear and torsion',
-      'shearDesignKN',
-      'webTrafficShare',
-      'webAtSupportsM',
-      'data/concrete-box/shear/designCot',
-    ],
-    ['most that can be placed', 'data/concrete-box/stirrupRatioMost'],
-    'EN 1992-1-1 6.2.3, 6.3.2 (from memory)',
-  ),
-  ...check(
     'top-room',
     ['most strands over a pier', 'topStrandCount'],
     [
@@ -150,19 +136,5 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
       'data/cantilever-box/bottomTendons/layers',
     ],
   ),
-  ...check(
-    'inner-height',
-    ['least height for striking the forms', 'data/concrete-box/leastInnerM'],
-    ['clear height inside', 'boxInnerHeightM'],
-  ),
-  ...check(
-    'deflection',
-    [
-      'traffic deflection in the middle of the worst span, by influence line',
-      'inertiaM4',
-      'spans',
-      './task/deck/carriagewayM',
-    ],
-    ['span / limit', 'spans', 'data/concrete-box/deflectionRatio'],
-  ),
+  ...anyBoxFigures(manual),
 ];

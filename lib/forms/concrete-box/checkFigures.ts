@@ -1,7 +1,9 @@
 import type { Descriptor } from '../../model/index.ts';
 import { formManual } from '../common/formManual.ts';
+import { anyBoxFigures } from './anyBoxFigures.ts';
 
-const { check } = formManual('concrete-box');
+const manual = formManual('concrete-box');
+const { check } = manual;
 const moments = ['span*OwnKNm', 'span*TrafficKNm', 'pier*OwnKNm', 'pier*TrafficKNm'];
 
 /** Limit states of a concrete box. */
@@ -98,18 +100,6 @@ export const boxCheckFigures: readonly Descriptor[] = [
     'EN 1992-1-1 6.2.3, 6.3.2 (from memory)',
   ),
   ...check(
-    'web-stirrups',
-    [
-      'stirrups of the outer web over its section, shear and torsion',
-      'shearDesignKN',
-      'webTrafficShare',
-      'webAtSupportsM',
-      'data/concrete-box/shear/designCot',
-    ],
-    ['most that can be placed', 'data/concrete-box/stirrupRatioMost'],
-    'EN 1992-1-1 6.2.3, 6.3.2 (from memory)',
-  ),
-  ...check(
     'tendon-room',
     ['strands of one web', 'strandCount', 'webs'],
     [
@@ -118,21 +108,6 @@ export const boxCheckFigures: readonly Descriptor[] = [
       'data/concrete-box/tendonRows/mostOverDepth',
       'data/concrete-box/tendonRows/abreast',
     ],
-  ),
-  ...check(
-    'inner-height',
-    ['least height for striking the forms', 'data/concrete-box/leastInnerM'],
-    ['clear height inside', 'boxInnerHeightM'],
-  ),
-  ...check(
-    'deflection',
-    [
-      'traffic deflection in the middle of the worst span, by influence line',
-      'inertiaM4',
-      'spans',
-      './task/deck/carriagewayM',
-    ],
-    ['span / limit', 'spans', 'data/concrete-box/deflectionRatio'],
   ),
   ...check(
     'launching',
@@ -150,4 +125,5 @@ export const boxCheckFigures: readonly Descriptor[] = [
       'data/concrete-box/launching/strengthShare',
     ],
   ),
+  ...anyBoxFigures(manual),
 ];

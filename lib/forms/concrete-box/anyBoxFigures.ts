@@ -1,0 +1,33 @@
+import type { Descriptor } from '../../model/index.ts';
+import type { formManual } from '../common/formManual.ts';
+
+/** Limit states that are those of every concrete box, in the manual of one of them. */
+export const anyBoxFigures = ({ check }: ReturnType<typeof formManual>): readonly Descriptor[] => [
+  ...check(
+    'web-stirrups',
+    [
+      'stirrups of the outer web over its section, shear and torsion',
+      'shearDesignKN',
+      'webTrafficShare',
+      'webAtSupportsM',
+      'data/concrete-box/shear/designCot',
+    ],
+    ['most that can be placed', 'data/concrete-box/stirrupRatioMost'],
+    'EN 1992-1-1 6.2.3, 6.3.2 (from memory)',
+  ),
+  ...check(
+    'inner-height',
+    ['least height for striking the forms', 'data/concrete-box/leastInnerM'],
+    ['clear height inside', 'boxInnerHeightM'],
+  ),
+  ...check(
+    'deflection',
+    [
+      'traffic deflection in the middle of the worst span, by influence line',
+      'inertiaM4',
+      'spans',
+      './task/deck/carriagewayM',
+    ],
+    ['span / limit', 'spans', 'data/concrete-box/deflectionRatio'],
+  ),
+];
