@@ -234,13 +234,20 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
       }
       // Once everything has been drawn its height is known, and what is off the screen need not be laid out any more.
       let asking: ReturnType<typeof setTimeout> | undefined;
+      let frame = 0;
       const skip = (): void => {
         if (hosts().some((host) => host.element.dataset['state'] === 'pending'))
           asking = setTimeout(() => rests.put(skip, Infinity), SKIP_ASK_MS);
-        else element.classList.add('skips');
+        // What was drawn last is laid out in the next frame, and its height seen at the end of it.
+        else {
+          frame = requestAnimationFrame(() => {
+            frame = requestAnimationFrame(() => element.classList.add('skips'));
+          });
+        }
       };
       stops.push(
         () => clearTimeout(asking),
+        () => cancelAnimationFrame(frame),
         () => rests.drop(skip),
       );
       skip();
