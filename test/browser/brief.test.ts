@@ -2,10 +2,10 @@ import { readFileSync } from 'node:fs';
 import { resolve } from 'node:path';
 import type { Locator, Page } from 'playwright-core';
 import { beforeEach, describe, expect, it } from 'vitest';
-import { oneStudyPage, settled } from './studyPage.ts';
+import { exampleOf, oneStudyPage, settled } from './studyPage.ts';
 
 const root = resolve(import.meta.dirname, '../..');
-const study = oneStudyPage();
+const study = oneStudyPage(exampleOf(['composite-i', 'concrete-box']));
 let page: Page;
 beforeEach(() => {
   ({ page } = study);

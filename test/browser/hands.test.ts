@@ -1,9 +1,8 @@
 import type { Page } from 'playwright-core';
 import { beforeAll, describe, expect, it } from 'vitest';
-import example from '../../data/examples/low-ferry.json' with { type: 'json' };
-import { middleOf, oneStudyPage, settled } from './studyPage.ts';
+import { exampleOf, middleOf, oneStudyPage, openAsFile, settled } from './studyPage.ts';
 
-const study = oneStudyPage();
+const study = oneStudyPage(exampleOf(['composite-i', 'concrete-box']));
 let page: Page;
 beforeAll(() => {
   ({ page } = study);
@@ -271,14 +270,7 @@ describe('by hand', () => {
   });
 
   it('a form that a rule puts out is worked out anyway, and left out again', async () => {
-    const twoForms = structuredClone(example) as { options: { forms: string[] } };
-    twoForms.options.forms = ['composite-i', 'slab'];
-    const [chooser] = await Promise.all([
-      page.waitForEvent('filechooser'),
-      page.getByRole('button', { name: 'Open', exact: true }).click(),
-    ]);
-    const buffer = Buffer.from(JSON.stringify(twoForms));
-    await chooser.setFiles({ name: 'study.json', mimeType: 'application/json', buffer });
+    await openAsFile(page, exampleOf(['composite-i', 'slab']));
     await page.waitForFunction(() =>
       document.querySelector('[id="3+020"]')?.textContent.includes('work it out anyway'),
     );

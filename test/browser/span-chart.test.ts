@@ -1,5 +1,5 @@
 import type { Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { openSite, type Heard, type Site } from './site.ts';
 
 let site: Site;
@@ -43,9 +43,23 @@ const said = (page: Page, place: string, words: string): Promise<unknown> =>
   );
 
 describe('span chart', () => {
-  it('opens with an answer for 60 m, seventeen forms, and says nothing', async () => {
-    const { page, heard } = await site.open('span-chart.html');
+  // One page for what can be taken back on it: opening one takes seconds.
+  let page: Page;
+  let heard: Heard;
+  beforeAll(async () => {
+    ({ page, heard } = await site.open('span-chart.html'));
     await settled(page);
+  });
+  afterEach(async () => {
+    await page.getByRole('combobox', { name: 'order of the forms' }).selectOption('family');
+    await page.getByRole('combobox', { name: 'line of the road' }).selectOption('straight');
+    await type(page, 'clear opening', '60');
+    await said(page, '.answer', 'asks for 63 m');
+    await settled(page);
+    silent(heard);
+  });
+
+  it('opens with an answer for 60 m, seventeen forms, and says nothing', async () => {
     expect(await answer(page)).toContain('asks for 63 m');
     expect(await answer(page)).toContain('Composite box, composite I and cantilever-built box are in');
     expect(await page.locator('[id="1+020"] g.form').count()).toBe(17);
@@ -54,12 +68,9 @@ describe('span chart', () => {
     );
     expect(await page.locator('[id="5+010"] li').count()).toBeGreaterThan(30);
     expect(await page.locator('body').innerText()).toContain('not for construction');
-    silent(heard);
   });
 
   it('another opening changes the answer, the standings, the depths and what was built', async () => {
-    const { page, heard } = await site.open('span-chart.html');
-    await settled(page);
     const depths = await page.locator('[id="2+010"]').innerText();
     await type(page, 'clear opening', '217');
     await said(page, '.answer', 'asks for 220 m');
@@ -72,26 +83,9 @@ describe('span chart', () => {
     for (const line of await asked.all()) expect((await line.boundingBox())?.width).toBeGreaterThan(20);
     expect(await rowOf(page, 'Composite I')).toContain('| out |');
     expect(await page.locator('[id="2+010"]').innerText()).not.toBe(depths);
-    silent(heard);
-  });
-
-  it('a tight curve puts straight forms out and says the radius', async () => {
-    const { page, heard } = await site.open('span-chart.html?opening=177&radius=600');
-    await settled(page);
-    expect(await rowOf(page, 'Truss')).toContain('| possible |');
-    await type(page, 'plan radius', '250');
-    await page.waitForFunction(() =>
-      [...document.querySelectorAll('[id="1+020"] g.form')].some((row) =>
-        row.textContent.includes('a straight truss cannot carry a road tighter than 300'),
-      ),
-    );
-    expect(await rowOf(page, 'Truss')).toContain('| out |');
-    silent(heard);
   });
 
   it('the road becomes straight or curved by choice, and the radius comes and goes with it', async () => {
-    const { page, heard } = await site.open('span-chart.html');
-    await settled(page);
     const radius = page.getByRole('spinbutton', { name: 'plan radius' });
     expect(await radius.isVisible()).toBe(false);
     await page.getByRole('combobox', { name: 'line of the road' }).selectOption('curved');
@@ -99,12 +93,9 @@ describe('span chart', () => {
     await said(page, '.block', 'radius 500 m');
     await page.getByRole('combobox', { name: 'line of the road' }).selectOption('straight');
     await said(page, '.block', 'straight');
-    silent(heard);
   });
 
   it('forms are listed by fit on request, the best first, and the choice keeps the focus', async () => {
-    const { page, heard } = await site.open('span-chart.html');
-    await settled(page);
     const first = (): Promise<string> =>
       page
         .locator('[id="1+020"] g.form text')
@@ -118,6 +109,53 @@ describe('span chart', () => {
       () => document.querySelector('[id="1+020"] g.form text')?.textContent === 'Composite box',
     );
     expect(await order.evaluate((field) => field === document.activeElement)).toBe(true);
+  });
+
+  it('a step of the opening changes the drawings of what hangs on the span, and no other', async () => {
+    await page.evaluate(() => {
+      for (const cell of document.querySelectorAll('.cell:has(svg)')) {
+        const seen = new MutationObserver(() => cell.setAttribute('data-changed', ''));
+        seen.observe(cell, { childList: true, characterData: true, subtree: true });
+        for (const svg of cell.querySelectorAll('svg'))
+          seen.observe(svg, { attributes: true, subtree: true });
+      }
+    });
+    /** Stations of drawings in which nothing has changed since the page was opened. */
+    const standing = (): Promise<string[]> =>
+      page.evaluate(() =>
+        [...document.querySelectorAll('.cell:has(svg):not([data-changed])')].map((cell) => cell.id),
+      );
+    const step = async (words: string): Promise<void> => {
+      await page.getByRole('spinbutton', { name: 'clear opening' }).press('ArrowUp');
+      await said(page, '[id="1+020"] .limit', words);
+      await said(page, '[id="3+010"] .limit', words);
+      await settled(page);
+    };
+    await step('64 m asked');
+    expect(await standing()).toEqual(['4+010']);
+    // The next bucket of what was built begins at 75 m.
+    await type(page, 'clear opening', '71');
+    await said(page, '[id="1+020"] .limit', '74 m asked');
+    await settled(page);
+    expect(await standing()).toEqual(['4+010']);
+    await step('75 m asked');
+    await said(page, '#s4 .finding', '75 to 100 m');
+    expect(await standing()).toEqual([]);
+  });
+});
+
+describe('a span chart of its own', () => {
+  it('a tight curve puts straight forms out and says the radius', async () => {
+    const { page, heard } = await site.open('span-chart.html?opening=177&radius=600');
+    await settled(page);
+    expect(await rowOf(page, 'Truss')).toContain('| possible |');
+    await type(page, 'plan radius', '250');
+    await page.waitForFunction(() =>
+      [...document.querySelectorAll('[id="1+020"] g.form')].some((row) =>
+        row.textContent.includes('a straight truss cannot carry a road tighter than 300'),
+      ),
+    );
+    expect(await rowOf(page, 'Truss')).toContain('| out |');
     silent(heard);
   });
 
@@ -160,41 +198,6 @@ describe('span chart', () => {
     await said(page, '.answer', 'asks for 83 m');
     await page.waitForFunction(() => document.querySelector('.limit text')?.textContent.startsWith('83'));
     expect(await fold.evaluate((one: HTMLDetailsElement) => one.open)).toBe(true);
-    silent(heard);
-  });
-
-  it('a step of the opening changes the drawings of what hangs on the span, and no other', async () => {
-    const { page, heard } = await site.open('span-chart.html');
-    await settled(page);
-    await page.evaluate(() => {
-      for (const cell of document.querySelectorAll('.cell:has(svg)')) {
-        const seen = new MutationObserver(() => cell.setAttribute('data-changed', ''));
-        seen.observe(cell, { childList: true, characterData: true, subtree: true });
-        for (const svg of cell.querySelectorAll('svg'))
-          seen.observe(svg, { attributes: true, subtree: true });
-      }
-    });
-    /** Stations of drawings in which nothing has changed since the page was opened. */
-    const standing = (): Promise<string[]> =>
-      page.evaluate(() =>
-        [...document.querySelectorAll('.cell:has(svg):not([data-changed])')].map((cell) => cell.id),
-      );
-    const step = async (words: string): Promise<void> => {
-      await page.getByRole('spinbutton', { name: 'clear opening' }).press('ArrowUp');
-      await said(page, '[id="1+020"] .limit', words);
-      await said(page, '[id="3+010"] .limit', words);
-      await settled(page);
-    };
-    await step('64 m asked');
-    expect(await standing()).toEqual(['4+010']);
-    // The next bucket of what was built begins at 75 m.
-    await type(page, 'clear opening', '71');
-    await said(page, '[id="1+020"] .limit', '74 m asked');
-    await settled(page);
-    expect(await standing()).toEqual(['4+010']);
-    await step('75 m asked');
-    await said(page, '#s4 .finding', '75 to 100 m');
-    expect(await standing()).toEqual([]);
     silent(heard);
   });
 });

@@ -1,5 +1,6 @@
 import type { Locator, Page } from 'playwright-core';
 import { afterAll, afterEach, beforeAll, expect } from 'vitest';
+import example from '../../data/examples/low-ferry.json' with { type: 'json' };
 import { openSite, type Heard, type Site } from './site.ts';
 
 /** A cell says only after 150 ms that it waits: what is seen before that may be of the study before. */
@@ -15,7 +16,7 @@ export async function settled(page: Page): Promise<void> {
       document.querySelector('.skips') !== null &&
       [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
     undefined,
-    { timeout: 60_000 },
+    { timeout: 60_000, polling: 100 },
   );
 }
 
@@ -49,17 +50,35 @@ export function silent(heard: Heard): void {
   expect(heard.elsewhere).toEqual([]);
 }
 
+/** The first worked example with some forms only: where the hand is tried, two say as much as four and are worked out sooner. */
+export const exampleOf = (forms: readonly string[]): object => ({
+  ...example,
+  options: { ...example.options, forms },
+});
+
+/** Opens a study as a file from the disk would be opened. */
+export async function openAsFile(page: Page, study: object): Promise<void> {
+  const chooser = page.waitForEvent('filechooser');
+  await page.getByRole('button', { name: 'Open', exact: true }).click();
+  const buffer = Buffer.from(JSON.stringify(study));
+  await (await chooser).setFiles({ name: 'study.json', mimeType: 'application/json', buffer });
+}
+
 /**
- * Opens the option study once for all tests of a file, for working it out takes seconds. After each test everything it changed
+ * Opens the option study, or a study of a test's own, once for all tests of a file, for working it out takes seconds. After each test everything it changed
  * is taken back, and the page must have been silent.
  */
-export function oneStudyPage(): { readonly page: Page } {
+export function oneStudyPage(study?: object): { readonly page: Page } {
   let site: Site;
   let page: Page;
   let heard: Heard;
   beforeAll(async () => {
     site = await openSite();
     ({ page, heard } = await site.open('option-study.html'));
+    await settled(page);
+    if (study === undefined) return;
+    await openAsFile(page, study);
+    await page.waitForURL(/study=/u);
     await settled(page);
   });
   afterEach(async () => {
