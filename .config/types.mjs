@@ -2,5 +2,5 @@
 import { resolve } from 'node:path';
 import { root, run } from './install.mjs';
 
-const checker = resolve(root, 'node_modules/typescript7/bin/tsc');
-for (const folder of ['lib', 'lib/cli', 'notebooks', 'test']) run(process.execPath, [checker, '-p', folder]);
+// The tests stand on every other folder; each folder is checked once, with its own library of types.
+run(process.execPath, [resolve(root, 'node_modules/typescript7/bin/tsc'), '--build', root]);
