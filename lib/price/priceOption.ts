@@ -43,10 +43,10 @@ export function priceOption(
   const parts = new Map<BillPart, Float64Array>();
   const partOf = (part: BillPart): Float64Array => {
     let found = parts.get(part);
-    if (found === undefined) parts.set(part, (found = new Float64Array(n)));
+    if (found === undefined) parts.set(part, (found = scratch(part, n).fill(0)));
     return found;
   };
-  const ones = new Float64Array(n).fill(1);
+  const ones = scratch('ones', n).fill(1);
   const sums: Sum[] = groupLines(option).map((group) => ({
     to: partOf(group.part),
     factor: factorOf(group, option, draws) ?? ones,
@@ -95,6 +95,15 @@ export function priceOption(
   };
 }
 
+/** Arrays that are done with when an option is priced, one for each use: a fresh megabyte an option keeps the collector busy. */
+const scratches = new Map<string, Float64Array>();
+
+function scratch(use: string, n: number): Float64Array {
+  let found = scratches.get(use);
+  if (found?.length !== n) scratches.set(use, (found = new Float64Array(n)));
+  return found;
+}
+
 /** P times its error, and that added to T, in each draw from `from` to before `to`. */
 function addWithError(T: Float64Array, P: Float64Array, error: Float64Array, from: number, to: number): void {
   for (let k = from; k < to; k++) {
@@ -106,7 +115,7 @@ function addWithError(T: Float64Array, P: Float64Array, error: Float64Array, fro
 
 /** T - P in each draw. */
 function less(T: Float64Array, P: Float64Array): Float64Array {
-  const L = new Float64Array(T.length);
+  const L = scratch('less', T.length);
   for (let k = 0; k < L.length; k++) L[k] = T[k]! - P[k]!;
   return L;
 }
@@ -154,8 +163,9 @@ function factorOf(group: Group, option: Priceable, draws: Draws): Float64Array |
   }
   if (!group.monthly) return null;
   const { low, high } = halfSigmas(option.months);
-  const F = draws.drivers.productivity.slice();
-  for (let k = 0; k < F.length; k++) F[k] = Math.exp((F[k]! < 0 ? low : high) * F[k]!);
+  const Z = draws.drivers.productivity;
+  const F = scratch(`months of ${group.part}`, Z.length);
+  for (let k = 0; k < F.length; k++) F[k] = Math.exp((Z[k]! < 0 ? low : high) * Z[k]!);
   return F;
 }
 

@@ -43,8 +43,9 @@ function countIntoBins(values: Float64Array): void {
   let low = Infinity;
   let high = -Infinity;
   for (let k = 0; k < values.length; k += SAMPLED) {
-    low = Math.min(low, values[k]!);
-    high = Math.max(high, values[k]!);
+    const value = values[k]!;
+    if (value < low) low = value;
+    if (value > high) high = value;
   }
   const perUnit = high > low ? BINS / (high - low) : 0;
   const [bins, counts] = [binOf, begins];

@@ -1,3 +1,4 @@
+import { noForces } from './combos.ts';
 import type { FootTask } from './foot.ts';
 import { demandAt } from './foot.ts';
 import type { GroundFigures } from './data.ts';
@@ -154,19 +155,26 @@ function leastGroup(
         if (wall && rowsAcross > 2 && widthM > task.shaftWidthM + 2 * diameterM) break;
         if (n * lateralKN < leastLateral || n * stress * area < leastVertical) continue;
         const undersideM = levels.capTopM - depthM;
-        const need = stratumLength(task, ground, {
-          diameterM,
-          lateralKN,
-          spacing,
-          rowsAlong,
-          rowsAcross,
-          lengthM,
-          widthM,
-          depthM,
-          undersideM,
-        });
-        if (need === null || need > reach * piles.longestInStratumM) continue;
         const startM = Math.min(levels.bearingLevelM, levels.scouredLevelM, undersideM);
+        // Longer piles than these are out of the tool's range, or cost more than the best so far: no need to know how long.
+        const mostM =
+          overrun +
+          Math.min(
+            reach * piles.longestInStratumM,
+            reach * piles.mostDiameters * diameterM - (undersideM - startM),
+            ((least - capVolume) / n - piles.perPileM3) / area - (undersideM - startM),
+          );
+        trial.diameterM = diameterM;
+        trial.lateralKN = lateralKN;
+        trial.spacing = spacing;
+        trial.rowsAlong = rowsAlong;
+        trial.rowsAcross = rowsAcross;
+        trial.lengthM = lengthM;
+        trial.widthM = widthM;
+        trial.depthM = depthM;
+        trial.undersideM = undersideM;
+        const need = stratumLength(task, ground, trial, mostM);
+        if (need === null || need > reach * piles.longestInStratumM) continue;
         const toeLevelM = startM - need;
         const pileLength = undersideM - toeLevelM;
         if (pileLength > reach * piles.mostDiameters * diameterM) continue;
@@ -188,22 +196,33 @@ function leastGroup(
   return best === null ? null : { group: best, effort: least };
 }
 
-interface Trial {
-  readonly diameterM: number;
-  readonly lateralKN: number;
-  readonly spacing: number;
-  readonly rowsAlong: number;
-  readonly rowsAcross: number;
-  readonly lengthM: number;
-  readonly widthM: number;
-  readonly depthM: number;
-  readonly undersideM: number;
-}
+/** The group that is tried: one record for all, for there are hundreds under every support. */
+const trial = {
+  diameterM: 0,
+  lateralKN: 0,
+  spacing: 0,
+  rowsAlong: 0,
+  rowsAcross: 0,
+  lengthM: 0,
+  widthM: 0,
+  depthM: 0,
+  undersideM: 0,
+};
 
-/** Length in the bearing stratum that the worst pile of a trial group needs, m; null when the group fails. */
-function stratumLength(task: FootTask, ground: GroundFigures, trial: Trial): number | null {
+const load = noForces();
+
+/** Room for rounding, m, past which a pile is surely too long. */
+const overrun = 1e-6;
+
+/** Length in the bearing stratum that the worst pile of a trial group needs, m; null when the group fails or needs more than `mostM`. */
+function stratumLength(
+  task: FootTask,
+  ground: GroundFigures,
+  group: Readonly<typeof trial>,
+  mostM: number,
+): number | null {
   const { piles } = substructureData;
-  const { diameterM: d, rowsAlong, rowsAcross, spacing } = trial;
+  const { diameterM: d, rowsAlong, rowsAcross, spacing, lengthM, widthM, depthM, undersideM } = group;
   const n = rowsAlong * rowsAcross;
   const area = (Math.PI * d * d) / 4;
   const perimeter = Math.PI * d;
@@ -212,8 +231,8 @@ function stratumLength(task: FootTask, ground: GroundFigures, trial: Trial): num
   const perMomentAcross = 6 / (n * spacing * (rowsAcross + 1));
   let inStratum = ground.socketDiameters * d;
   for (const combo of task.combos) {
-    const load = demandAt(task, combo, trial.lengthM, trial.widthM, trial.depthM, trial.undersideM);
-    if (Math.sqrt(load.alongKN ** 2 + load.acrossKN ** 2) > n * trial.lateralKN * combo.capacity) return null;
+    demandAt(task, combo, lengthM, widthM, depthM, undersideM, load);
+    if (Math.sqrt(load.alongKN ** 2 + load.acrossKN ** 2) > n * group.lateralKN * combo.capacity) return null;
     const swing =
       Math.abs(load.momentAlongKNm) * perMomentAlong + Math.abs(load.momentAcrossKNm) * perMomentAcross;
     const most = (load.verticalKN / n + swing) / combo.capacity;
@@ -222,6 +241,7 @@ function stratumLength(task: FootTask, ground: GroundFigures, trial: Trial): num
     const forLoad = (most * piles.safety - ground.baseKPa * area) / (ground.shaftKPa * perimeter);
     const forUplift = (-least * piles.safety) / (piles.tensionShare * ground.shaftKPa * perimeter);
     inStratum = Math.max(inStratum, forLoad, forUplift);
+    if (inStratum > mostM) return null;
   }
   return inStratum;
 }

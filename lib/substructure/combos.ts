@@ -29,20 +29,28 @@ export interface Backfill {
 
 /** Loads of a combination brought down to one level: V, H and M in kN and kNm. */
 export interface Resultant {
-  readonly verticalKN: number;
-  readonly alongKN: number;
-  readonly acrossKN: number;
-  readonly momentAlongKNm: number;
-  readonly momentAcrossKNm: number;
+  verticalKN: number;
+  alongKN: number;
+  acrossKN: number;
+  momentAlongKNm: number;
+  momentAcrossKNm: number;
 }
 
-/** Brings the loads of a combination down to `levelM`. */
-export function resultantAt(combo: Combo, levelM: number): Resultant {
-  return {
-    verticalKN: combo.verticalKN,
-    alongKN: combo.alongKN,
-    acrossKN: combo.acrossKN,
-    momentAlongKNm: (combo.momentAlongKNm ?? 0) + combo.alongKN * Math.max(0, combo.alongLevelM - levelM),
-    momentAcrossKNm: combo.acrossKN * Math.max(0, combo.acrossLevelM - levelM),
-  };
+/** A resultant to be written to. */
+export const noForces = (): Resultant => ({
+  verticalKN: 0,
+  alongKN: 0,
+  acrossKN: 0,
+  momentAlongKNm: 0,
+  momentAcrossKNm: 0,
+});
+
+/** Brings the loads of a combination down to `levelM`; writes them to `into` and hands it back. */
+export function resultantAt(combo: Combo, levelM: number, into: Resultant = noForces()): Resultant {
+  into.verticalKN = combo.verticalKN;
+  into.alongKN = combo.alongKN;
+  into.acrossKN = combo.acrossKN;
+  into.momentAlongKNm = (combo.momentAlongKNm ?? 0) + combo.alongKN * Math.max(0, combo.alongLevelM - levelM);
+  into.momentAcrossKNm = combo.acrossKN * Math.max(0, combo.acrossLevelM - levelM);
+  return into;
 }

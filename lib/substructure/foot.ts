@@ -1,5 +1,5 @@
-import type { Backfill, Combo } from './combos.ts';
-import { resultantAt } from './combos.ts';
+import type { Backfill, Combo, Resultant } from './combos.ts';
+import { noForces, resultantAt } from './combos.ts';
 import { substructureData } from './data.ts';
 
 /** What every foundation of one support has in common, whatever the ground. Metres, kN. */
@@ -28,19 +28,11 @@ export interface FoundationTask extends FootTask {
   readonly shaftItem: 'pier-concrete' | 'abutment-concrete' | 'pylon-concrete';
 }
 
-/** Demand on a foundation of given plan at its underside: loads of every combination with own weight, soil and earth pressure. */
-export interface Demand {
-  readonly verticalKN: number;
-  readonly alongKN: number;
-  readonly acrossKN: number;
-  readonly momentAlongKNm: number;
-  readonly momentAcrossKNm: number;
-}
-
 /**
  * Loads at the underside of a footing or cap of `lengthM` x `widthM` x `depthM`, whose underside is at `undersideM`.
  * Adds its own weight less buoyancy, the ground over it, and for an abutment the soil on the heel and active pressure
  * with surcharge (Rankine). Moments are about the middle of the plan; along is positive towards the span.
+ * @param into what the demand is written to and handed back as: one record will do for all the sizes that are tried
  */
 export function demandAt(
   task: FootTask,
@@ -49,7 +41,8 @@ export function demandAt(
   widthM: number,
   depthM: number,
   undersideM: number,
-): Demand {
+  into: Resultant = noForces(),
+): Resultant {
   const { concrete, footing, abutment } = substructureData;
   const plan = lengthM * widthM;
   const topM = undersideM + depthM;
@@ -58,17 +51,11 @@ export function demandAt(
   const submerged =
     task.waterLevelM === null ? 0 : Math.max(0, Math.min(task.waterLevelM, topM) - undersideM);
   const own = plan * depthM * concrete.weightKNm3 - plan * submerged * waterKNm3;
-  const loads = resultantAt(combo, undersideM);
+  resultantAt(combo, undersideM, into);
+  const loadKN = into.verticalKN;
   if (task.backfill === null) {
-    const cover = (plan - shaftPlan) * coverM * soilOver(task.waterLevelM, topM);
-    // Field by field: this is asked for at every size tried, and a copied record costs more than the sums in it.
-    return {
-      verticalKN: loads.verticalKN + own + cover,
-      alongKN: loads.alongKN,
-      acrossKN: loads.acrossKN,
-      momentAlongKNm: loads.momentAlongKNm,
-      momentAcrossKNm: loads.momentAcrossKNm,
-    };
+    into.verticalKN = loadKN + own + (plan - shaftPlan) * coverM * soilOver(task.waterLevelM, topM);
+    return into;
   }
   const { topLevelM, widthM: wallM, heelShare, inLoads } = task.backfill;
   const outside = Math.max(0, lengthM - task.shaftLengthM);
@@ -83,18 +70,11 @@ export function demandAt(
   // Distances from the middle of the plan, positive towards the span.
   const stemAt = lengthM / 2 - toe - task.shaftLengthM / 2;
   const heelAt = -(lengthM / 2 - heel / 2);
-  return {
-    verticalKN: loads.verticalKN + own + soil,
-    alongKN: loads.alongKN + earth + surcharge,
-    acrossKN: loads.acrossKN,
-    momentAlongKNm:
-      loads.momentAlongKNm +
-      (earth * height) / 3 +
-      (surcharge * height) / 2 +
-      loads.verticalKN * stemAt +
-      soil * heelAt,
-    momentAcrossKNm: loads.momentAcrossKNm,
-  };
+  into.verticalKN = loadKN + own + soil;
+  into.alongKN = into.alongKN + earth + surcharge;
+  into.momentAlongKNm =
+    into.momentAlongKNm + (earth * height) / 3 + (surcharge * height) / 2 + loadKN * stemAt + soil * heelAt;
+  return into;
 }
 
 const waterKNm3 = 10;

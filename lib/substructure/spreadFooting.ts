@@ -1,3 +1,4 @@
+import { noForces } from './combos.ts';
 import type { FootTask } from './foot.ts';
 import { demandAt } from './foot.ts';
 import type { GroundFigures } from './data.ts';
@@ -51,6 +52,8 @@ function footingDepth(task: FootTask, ground: GroundFigures, lengthM: number, wi
   return Math.max(leastDepthM, (overhang * q) / (q + shearKPa) + coverM);
 }
 
+const demand = noForces();
+
 function stands(
   task: FootTask,
   ground: GroundFigures,
@@ -65,7 +68,7 @@ function stands(
   for (const combo of task.combos)
     if (combo.verticalKN > ground.allowableKPa * combo.capacity * plan) return false;
   for (const combo of task.combos) {
-    const d = demandAt(task, combo, lengthM, widthM, depthM, undersideM);
+    const d = demandAt(task, combo, lengthM, widthM, depthM, undersideM, demand);
     if (!(d.verticalKN > 0)) return false;
     const e = Math.abs(d.momentAlongKNm) / d.verticalKN;
     const f = Math.abs(d.momentAcrossKNm) / d.verticalKN;

@@ -1,7 +1,7 @@
 import type { OwnWeight } from './boxLoads.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
-import { leastForce, type Drape } from './leastForce.ts';
+import { leastForce, type Drape, type DrapeNeed } from './leastForce.ts';
 import type { LaunchedDeck } from './launchedDeck.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { serviceNeed } from './serviceNeed.ts';
@@ -83,9 +83,10 @@ export function findTendons(
     if (before && way !== before.way) return [];
     const line = tendonLine(model, sections, group, shapes);
     const ultimate = ultimateNeed(model, sections, own, stress.lastingMPa, straightM2, steadiedKN, shapes);
-    const need = (drape: Drape): number => {
+    const need: DrapeNeed = (drape, enough) => {
       const at = line(drape);
-      return Math.max(service(at), ultimate(at));
+      const forService = service(at, enough);
+      return forService >= enough ? forService : Math.max(forService, ultimate(at, enough));
     };
     const { drape, forceKN } = leastForce(need, spansM.length, before?.drape ?? null);
     return [{ way, drape, forceKN, meanShare: shapes.meanShare, line }];

@@ -4,6 +4,9 @@ export type Drape = readonly [endSpan: number, innerSpan: number, pier: number];
 const coarse = [0.2, 0.6, 1] as const;
 const finest = 0.02;
 
+/** A force that a drape needs; one that is `enough` or more may be said as soon as that is known. */
+export type DrapeNeed = (drape: Drape, enough: number) => number;
+
 /**
  * Drape that needs the least force: a coarse grid, then halved steps round the best. The force is the largest of ratios
  * with the drape in the denominators, so that its inverse is concave and there is one region of lowest force.
@@ -12,20 +15,19 @@ const finest = 0.02;
  * @param spans number of spans; shapes that the unit does not have stay at 1
  */
 export function leastForce(
-  need: (drape: Drape) => number,
+  need: DrapeNeed,
   spans: number,
   start: Drape | null,
 ): { readonly drape: Drape; readonly forceKN: number } {
   let best: Drape = start ?? [1, 1, 1];
-  let least = need(best);
+  let least = need(best, Infinity);
   const visit = (drape: Drape): void => {
-    const force = need(drape);
+    const force = need(drape, least);
     if (!(force < least)) return;
     least = force;
     best = drape;
   };
   const whole = [1] as const;
-  const still = [0] as const;
   const grid = start === null || least === Infinity;
   if (grid)
     for (const a of coarse)
@@ -33,14 +35,15 @@ export function leastForce(
         for (const c of spans > 1 ? coarse : whole) visit([a, b, c]);
   for (let step = grid ? 0.2 : 0.05; step > finest; step /= 2) {
     const [a, b, c] = best;
-    const steps = [-step, 0, step];
-    for (const da of steps)
-      for (const db of spans > 2 ? steps : still)
-        for (const dc of spans > 1 ? steps : still) visit([within(a + da), within(b + db), within(c + dc)]);
+    const inner = spans > 2 ? around(b, step) : [b];
+    const piers = spans > 1 ? around(c, step) : [c];
+    for (const x of around(a, step))
+      for (const y of inner) for (const z of piers) if (x !== a || y !== b || z !== c) visit([x, y, z]);
   }
   return { drape: best, forceKN: least };
 }
 
-function within(share: number): number {
-  return Math.min(1, Math.max(0, share));
+/** A share and its neighbours within 0 and 1, each once. */
+function around(share: number, step: number): number[] {
+  return [...new Set([Math.max(0, share - step), share, Math.min(1, share + step)])];
 }

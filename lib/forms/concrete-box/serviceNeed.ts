@@ -17,6 +17,9 @@ export type ServiceSections = Pick<SectionsAlong, 'areaM2' | 'inertiaM4' | 'topM
   readonly span: { readonly inertiaM4: number };
 };
 
+/** Draped force that a limit asks for along a line of the tendons, kN; one that is `enough` or more may be said as soon as that is known. */
+export type LineNeed = (line: TendonLine, enough?: number) => number;
+
 /** Draped force of the heaviest span after all losses that service asks for along a given line of the tendons, kN; Infinity where none will do. */
 export function serviceNeed(
   model: ServiceModel,
@@ -25,7 +28,7 @@ export function serviceNeed(
   group: Pick<TendonGroup, 'heightM'>,
   straightKN: number,
   gradient: Omit<typeof boxData.gradient, 'source'> = boxData.gradient,
-): (line: TendonLine) => number {
+): LineNeed {
   const { service } = model.traffic;
   const spread = boxData.prestressSpread[model.standardId];
   const tension = boxData.serviceTensionMPa[model.standardId] * 1e3;
@@ -50,9 +53,12 @@ export function serviceNeed(
       service.momentMinKNm[i]! +
       Math.min(arched * gradient.topWarmerK, -arched * gradient.topCoolerK);
   }
-  return ({ eccentricityM, parasiticM, share }) => {
+  // The station that ruled a line out is asked first about the next: its neighbours are ruled out by the same one.
+  let first = 0;
+  return ({ eccentricityM, parasiticM, share }, enough = Infinity) => {
     let most = 0;
-    for (let i = 0; i < n; i++) {
+    for (let k = -1; k < n; k++) {
+      const i = k < 0 ? first : k;
       const area = sections.areaM2[i]!;
       const inertia = sections.inertiaM4[i]!;
       const e = eccentricityM[i]!;
@@ -68,6 +74,10 @@ export function serviceNeed(
         forceFor(lowNeed, sagging[i]! * down > straight),
         forceFor(highNeed, -hogging[i]! * up > straight),
       );
+      if (most >= enough) {
+        first = i;
+        return most;
+      }
     }
     return most;
   };

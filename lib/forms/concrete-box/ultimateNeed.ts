@@ -4,7 +4,7 @@ import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
-import type { TendonLine } from './tendonLine.ts';
+import type { LineNeed } from './serviceNeed.ts';
 import type { TendonShapes } from './tendonShape.ts';
 import { ultimateMoments } from './ultimateMoments.ts';
 
@@ -20,7 +20,7 @@ export function ultimateNeed(
   straightM2: number,
   beforeKN: number,
   { share }: TendonShapes,
-): (line: TendonLine) => number {
+): LineNeed {
   const { task, layout, standard } = model;
   const { down, up } = ultimateMoments(model, own);
   const grown = strandDesignMPa(model) / lastingMPa;
@@ -50,7 +50,7 @@ export function ultimateNeed(
     });
   }
   const prestress = standard.factors.uls.prestress;
-  return ({ depthM, parasiticM }) => {
+  return ({ depthM, parasiticM }, enough = Infinity) => {
     let most = 0;
     for (let i = 0; i < n; i++) {
       const m = prestress * parasiticM[i]!;
@@ -59,6 +59,7 @@ export function ultimateNeed(
       if (sag > 0) most = Math.max(most, over(sag, strength * (depthM[i]! - block[0][i]!) - m));
       const hog = up[i]! - fixed[1][i]!;
       if (hog > 0) most = Math.max(most, over(hog, strength * (task.depthM - depthM[i]! - block[1][i]!) + m));
+      if (most >= enough) break;
     }
     return most;
   };

@@ -1,5 +1,5 @@
 import { materials } from '../../actions/index.ts';
-import { leastForce, type Drape } from '../concrete-box/leastForce.ts';
+import { leastForce } from '../concrete-box/leastForce.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { serviceNeed, type ServiceSections } from '../concrete-box/serviceNeed.ts';
 import { tendonStress, type TendonStress } from '../concrete-box/tendonForce.ts';
@@ -67,7 +67,7 @@ export function findSlabTendons(model: SlabModel, atLeast = 0): SlabTendons {
     const need = serviceNeed(model, sections, model.own, { heightM: ductM }, 0, slabDeckData.gradient);
     const tried = shapes.map((shape) => {
       const line = tendonLine(model, sections, { fromFaceM }, shape);
-      const found = leastForce((drape: Drape) => need(line(drape)), spansM.length, null);
+      const found = leastForce((drape, enough) => need(line(drape), enough), spansM.length, null);
       return { ...found, line, meanShare: shape.meanShare };
     });
     const found = tried.reduce((a, b) => (b.forceKN * b.meanShare < a.forceKN * a.meanShare ? b : a));

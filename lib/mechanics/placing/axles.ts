@@ -30,12 +30,22 @@ export function runGroup(
   else sumPlacings(placings, group, line, 0, swept);
   let top = 0;
   let bottom = 0;
+  let most = positive[0]!;
+  let least = negative[0]!;
   for (let k = 1; k < swept; k++) {
-    if (positive[k]! > positive[top]!) top = k;
-    if (negative[k]! < negative[bottom]!) bottom = k;
+    const up = positive[k]!;
+    const down = negative[k]!;
+    if (up > most) {
+      most = up;
+      top = k;
+    }
+    if (down < least) {
+      least = down;
+      bottom = k;
+    }
   }
-  out.max = Math.max(0, positive[top]!);
-  out.min = Math.min(0, negative[bottom]!);
+  out.max = Math.max(0, most);
+  out.min = Math.min(0, least);
   if (out.max > 0) out.max = Math.max(out.max, vertexValue(track, group, placings, line, top, 1));
   if (out.min < 0) out.min = Math.min(out.min, vertexValue(track, group, placings, line, bottom, -1));
   if (section >= 0) onSection(placings, group, line, section, track.xM.length, out);

@@ -80,7 +80,7 @@ export function sumSection(
   { stretch, station, arm, turn }: StretchSection,
 ): void {
   const placings = placingsOf(track, group);
-  const { positionM, positive, negative, swept } = placings;
+  const { positionM, positive, swept } = placings;
   const { rightQ, rightT, leftQ, leftT } = sumsOf(stretch, group, placings);
   const x = track.xM[station]!;
   const lengthM = group.atM[group.atM.length - 1]!;
@@ -91,8 +91,6 @@ export function sumSection(
   combine(positive, leftQ, leftT, arm, turn, 0, from);
   sumPlacings(placings, group, line, from, to);
   combine(positive, rightQ, rightT, arm, turn, to, swept);
-  // All axles count both ways.
-  negative.set(positive);
 }
 
 function sumsOf({ sums, left, right }: Stretch, group: AxleGroup, placings: Placings): StretchSums {

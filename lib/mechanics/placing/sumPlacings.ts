@@ -27,9 +27,9 @@ export function sumPlacings(
         weight[w + 2]! * line[e + 2]! +
         weight[w + 3]! * line[e + 3]!;
       all += value;
-      adds += Math.max(0, value);
+      if (value > 0) adds += value;
     }
     positive[k] = whole ? all : adds;
-    negative[k] = whole ? all : all - adds;
+    if (!whole) negative[k] = all - adds;
   }
 }

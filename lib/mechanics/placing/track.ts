@@ -32,7 +32,7 @@ export interface Placings {
   readonly weight: Float64Array;
   /** Placing in which axle i stands on station s, at i * stations + s. */
   readonly onStation: Int32Array;
-  /** Sums of the line last summed: positive parts, negative parts (both the whole for a whole group). */
+  /** Sums of the line last summed: positive parts, negative parts; one and the same for a whole group. */
   readonly positive: Float64Array;
   readonly negative: Float64Array;
 }
@@ -109,15 +109,9 @@ function makePlacings({ xM, kinked }: Track, group: AxleGroup): Placings {
       entry[k * axles + i] = weighAxle(xM, x, group.loadKN[i]!, weight, 4 * (k * axles + i));
     }
   });
-  return {
-    swept,
-    positionM,
-    entry,
-    weight,
-    onStation,
-    positive: new Float64Array(count),
-    negative: new Float64Array(count),
-  };
+  const positive = new Float64Array(count);
+  const negative = group.whole ? positive : new Float64Array(count);
+  return { swept, positionM, entry, weight, onStation, positive, negative };
 }
 
 /** Writes the weights of an axle at x from `offset`; returns the first entry of its element. Off the track: nil. */
