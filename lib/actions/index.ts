@@ -10,4 +10,13 @@ export { rigidCrossbeam, trafficOnGirder, type GirderOptions } from './trafficOn
 export { trafficTorsion, type TrafficTorsion } from './trafficTorsion.ts';
 export { trafficEnvelope, type EnvelopeOptions, type TrafficEnvelope } from './trafficEnvelope.ts';
 export { trafficOnInfluence } from './trafficOnInfluence.ts';
-export { concrete, materials, steelYield, usualSteel, type Concrete, type SteelGrade } from './materials.ts';
+export {
+  concrete,
+  lightConcrete,
+  materials,
+  steelYield,
+  usualSteel,
+  type Concrete,
+  type LightConcrete,
+  type SteelGrade,
+} from './materials.ts';

@@ -23,6 +23,15 @@ const cable = z.strictObject({
   unitWeightKNm3: positive,
   source: z.string(),
 });
+const light = z.strictObject({
+  source: z.string(),
+  note: z.string(),
+  referenceKgM3: positive,
+  stiffnessPower: positive,
+  tensionFixed: z.number().min(0).max(1),
+  strutShare: positive,
+  reinforcedMoreKgM3: positive,
+});
 const strengths = z.strictObject({ slab: positive, girder: positive, box: positive, substructure: positive });
 
 const schema = z.strictObject({
@@ -32,6 +41,8 @@ const schema = z.strictObject({
   strand: z.record(z.enum(standardIds), strand),
   stay: cable,
   mainCable: cable,
+  /** Oven-dry densities it may have, and what they do to weight, stiffness and strength under each standard. */
+  lightConcrete: z.strictObject({ leastKgM3: positive, mostKgM3: positive, lm1: light, hl93: light }),
   /** Cylinder strengths taken when nothing is said, MPa. */
   concreteDefaultMPa: z.record(z.enum(standardIds), strengths),
 });
@@ -66,6 +77,8 @@ export interface Concrete {
   /** Mean tensile strength (EN) or modulus of rupture (AASHTO). */
   readonly fctmMPa: number;
   readonly ecmMPa: number;
+  /** Shear that its struts (EN) or the concrete itself (AASHTO) carry against ordinary concrete of the same strength; 1 when absent. */
+  readonly shearShare?: number;
 }
 
 /**
@@ -89,5 +102,43 @@ export function concrete(id: StandardId, fckMPa: number): Concrete {
     fcdMPa,
     fctmMPa: fckMPa <= 50 ? 0.3 * fckMPa ** (2 / 3) : 2.12 * Math.log(1 + mean / 10),
     ecmMPa: 22000 * (mean / 10) ** 0.3,
+  };
+}
+
+/** Lightweight concrete: strength and stiffness as `Concrete`, and its weight with bars and tendons. */
+export interface LightConcrete extends Concrete {
+  readonly shearShare: number;
+  readonly unitWeightKNm3: number;
+}
+
+/**
+ * Lightweight concrete by its cylinder strength and oven-dry density: EN 1992-1-1 section 11 (eta_E, eta_1) or AASHTO LRFD
+ * 5.4.2 (w^1.5, lambda), both from memory; see `data/materials.json`.
+ * @param densityKgM3 oven-dry, 1400 to 2200 kg/m3
+ * @throws RangeError for a density outside that range or a strength that is not positive
+ */
+export function lightConcrete(id: StandardId, fckMPa: number, densityKgM3: number): LightConcrete {
+  const { leastKgM3, mostKgM3 } = materials.lightConcrete;
+  if (!(densityKgM3 >= leastKgM3 && densityKgM3 <= mostKgM3))
+    throw new RangeError(
+      `lightweight concrete: expected ${leastKgM3} to ${mostKgM3} kg/m3 oven-dry, received ${densityKgM3}`,
+    );
+  const law = materials.lightConcrete[id];
+  const ordinary = concrete(id, fckMPa);
+  const ratio = densityKgM3 / law.referenceKgM3;
+  const tension = Math.min(1, law.tensionFixed + (1 - law.tensionFixed) * ratio);
+  const unitWeightKNm3 = ((densityKgM3 + law.reinforcedMoreKgM3) * 9.81) / 1e3;
+  // AASHTO writes the modulus with the weight itself; ordinary concrete stands for the weight of the standard.
+  const stiffness =
+    id === 'hl93'
+      ? (densityKgM3 / ((loadStandard(id).unitWeights.concreteKNm3 / 9.81) * 1e3)) ** law.stiffnessPower
+      : ratio ** law.stiffnessPower;
+  return {
+    fckMPa,
+    fcdMPa: ordinary.fcdMPa,
+    fctmMPa: tension * ordinary.fctmMPa,
+    ecmMPa: Math.min(1, stiffness) * ordinary.ecmMPa,
+    shearShare: tension * law.strutShare,
+    unitWeightKNm3,
   };
 }

@@ -1,3 +1,4 @@
+import { materials } from '../actions/index.ts';
 import { leastCostDepth } from '../appraise/leastCostDepth.ts';
 import { depthRange } from '../appraise/depthRange.ts';
 import { finish } from '../appraise/work.ts';
@@ -24,6 +25,10 @@ const flagNames = [
   'radius',
   'loading',
   'girders',
+  'strength',
+  'light',
+  'light-middles',
+  'ballast',
 ];
 const SURFACING_M = 0.09;
 /** Barriers take what the carriageway leaves of the width, half on each side. */
@@ -45,6 +50,72 @@ function oneOf<T extends string>(
     remedy: `give --${name}`,
   });
   return undefined;
+}
+
+/** One number for each span, or a problem added to the list; undefined when the flag is absent. */
+function bySpan(
+  flags: Flags,
+  name: string,
+  spansM: readonly number[],
+  { most, unit }: { readonly most: (span: number) => number; readonly unit: string },
+  problems: Problem[],
+): number[] | undefined {
+  const text = flags.values[name];
+  if (text === undefined) return undefined;
+  const values = text.split(',').map((part) => (part.trim() === '' ? NaN : Number(part)));
+  if (values.length === spansM.length && values.every((value, span) => value >= 0 && value <= most(span)))
+    return values;
+  problems.push({
+    code: values.some(Number.isNaN) ? 'wrong-type' : 'outside',
+    path: [`--${name}`],
+    expected: `a number for each of ${spansM.length} spans: ${spansM.map((_, span) => `0 to ${most(span)}`).join(', ')}`,
+    received: text,
+    unit,
+    remedy: `give --${name} with commas between, 0 for a span without`,
+  });
+  return undefined;
+}
+
+/** What a concrete box is made of besides the usual: strength, lightweight concrete, ballast. */
+function concreteOf(
+  flags: Flags,
+  form: FormId | undefined,
+  spansM: readonly number[],
+  problems: Problem[],
+): Pick<UnitTask, 'strengthMPa' | 'light' | 'ballastKNm'> {
+  const names = ['strength', 'light', 'light-middles', 'ballast'] as const;
+  const given = names.filter((name) => flags.values[name] !== undefined);
+  if (form && given.length > 0 && !formModule(form).readsConcrete)
+    problems.push({
+      code: 'unknown-key',
+      path: [`--${given[0]!}`],
+      expected: `a form that reads it: ${sizeableForms.filter((id) => formModule(id).readsConcrete).join(', ')}`,
+      received: form,
+      remedy: `leave --${given.join(' and --')} out`,
+    });
+  if ((flags.values['light'] === undefined) !== (flags.values['light-middles'] === undefined))
+    needFlags(flags, ['light', 'light-middles'], problems);
+  const { leastKgM3, mostKgM3 } = materials.lightConcrete;
+  const strengthMPa = numberFlag(flags, 'strength', { above: 20, most: 90, unit: 'MPa' }, problems);
+  const densityKgM3 = numberFlag(
+    flags,
+    'light',
+    { above: leastKgM3, most: mostKgM3, unit: 'kg/m3' },
+    problems,
+  );
+  const middleM = bySpan(
+    flags,
+    'light-middles',
+    spansM,
+    { most: (span) => spansM[span]!, unit: 'm' },
+    problems,
+  );
+  const ballastKNm = bySpan(flags, 'ballast', spansM, { most: () => 2000, unit: 'kN/m' }, problems);
+  return {
+    ...(strengthMPa === undefined ? {} : { strengthMPa }),
+    ...(densityKgM3 === undefined || middleM === undefined ? {} : { light: { densityKgM3, middleM } }),
+    ...(ballastKNm === undefined ? {} : { ballastKNm }),
+  };
 }
 
 function spansOf(flags: Flags, problems: Problem[]): number[] {
@@ -101,6 +172,7 @@ function readTask(argv: readonly string[]): Asked {
     standardIds,
     problems,
   );
+  const concrete = concreteOf(flags, form, spansM, problems);
   needFlags(flags, ['width', 'lanes'], problems);
   if (widthM !== undefined && carriagewayM !== undefined && !(carriagewayM > 0 && carriagewayM <= widthM)) {
     problems.push({
@@ -144,6 +216,7 @@ function readTask(argv: readonly string[]): Asked {
       planRadiusM,
       method: module.methods[0],
       ...(girders === undefined ? {} : { girders }),
+      ...concrete,
       ...(module.pattern.kind === 'pylon' ? { pylons: pylonsOf(spansM) } : {}),
     },
   };
@@ -173,7 +246,8 @@ function depthSought(asked: Asked): number {
 
 /**
  * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
- * Without a depth the one of least cost in the published band is taken.
+ * Without a depth the one of least cost in the published band is taken. Concrete boxes read `--strength` (MPa), `--light`
+ * (oven-dry density, kg/m3) with `--light-middles` (length about the middle of each span, m), and `--ballast` (kN/m by span).
  */
 export function sizeCommand(argv: readonly string[]): Said {
   const asked = readTask(argv);

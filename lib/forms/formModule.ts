@@ -28,6 +28,8 @@ export interface FormModule {
   readonly joined?: 'after-placing' | 'never';
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
   readonly ignoresHeight?: true;
+  /** Strength, lightweight concrete and ballast of its task are read. */
+  readonly readsConcrete?: true;
   /** Of the choices of a variant those that the form has. */
   readonly choices?: readonly (keyof Variant)[];
   /**

@@ -23,12 +23,26 @@ export interface UnitTask {
   readonly transverse?: true;
   /** Concrete boxes: inclined struts under the wings of the top slab, so that fewer cells carry the deck. */
   readonly struts?: true;
+  /** Concrete boxes: cylinder strength of the concrete, MPa; the usual one of the standard when absent. */
+  readonly strengthMPa?: number;
+  /** Concrete boxes: lightweight concrete about the middles of spans; none when absent. */
+  readonly light?: LightMiddles;
+  /** Concrete boxes: ballast in the cells by span, kN per m of deck, laid on the joined deck; none when absent. */
+  readonly ballastKNm?: readonly number[];
   /** Thickness of an orthotropic deck plate, m, where it is given; by wheels and surfacing when absent. */
   readonly deckPlateM?: number;
   /** Cable-stayed: which supports (0-based) carry pylons. */
   readonly pylons?: readonly number[];
   /** Height of the soffit above ground at each support, m, where known (pylon legs, walls, falsework). */
   readonly clearUnderM?: readonly number[];
+}
+
+/** Lightweight concrete of a deck. */
+export interface LightMiddles {
+  /** Oven-dry density, kg/m3. */
+  readonly densityKgM3: number;
+  /** By span: length about its middle that is made of it, m. */
+  readonly middleM: readonly number[];
 }
 
 /** Depth law of haunched girders. */

@@ -45,6 +45,29 @@ describe('size', () => {
     expect(printed.err).toMatch(/width: expected .* received wide/);
   });
 
+  it('size(cantilever-box --light) takes lightweight concrete, strength and ballast by span', () => {
+    const line = '--form cantilever-box --spans 65,110,65 --width 12 --lanes 3 --depth 3';
+    const lighter = size(`${line} --strength 60 --light 1900 --light-middles 0,60,0 --ballast 30,0,30`);
+    expect(lighter.quantities['prestressKg']).toBeLessThan(size(line).quantities['prestressKg']!);
+  });
+
+  it.each([
+    ['--light 1900', /light-middles/],
+    ['--light 900 --light-middles 0,20,0', /light: expected a number above 1400/],
+    ['--light 1900 --light-middles 0,120,0', /light-middles: expected .*0 to 65, 0 to 110, 0 to 65/],
+    ['--ballast 30,30', /ballast: expected a number for each of 3 spans/],
+  ])('size(cantilever-box %s) is refused', (flags, said) => {
+    const line = `--form cantilever-box --spans 65,110,65 --width 12 --lanes 3 --depth 3 ${flags}`;
+    const printed = answer(sizeCommand, line);
+    expect(printed.code).toBe(2);
+    expect(printed.err).toMatch(said);
+  });
+
+  it('size(composite-i --ballast) names the forms that read it', () => {
+    const line = '--form composite-i --spans 60,80,60 --width 12 --lanes 3 --depth 3 --ballast 1,1,1';
+    expect(answer(sizeCommand, line).err).toMatch(/concrete-box, cantilever-box/);
+  });
+
   it('size(form nobody knows) names the forms there are', () => {
     const printed = answer(sizeCommand, '--form rope --spans 60 --width 12 --lanes 2');
     expect(printed.code).toBe(2);

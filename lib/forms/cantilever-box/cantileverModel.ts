@@ -1,8 +1,9 @@
-import { concrete, loadStandard, materials, type Concrete, type LoadStandard } from '../../actions/index.ts';
+import { loadStandard, type LoadStandard } from '../../actions/index.ts';
 import { imposedCurvature, uniform, type Effects, type LineBeam } from '../../mechanics/index.ts';
 import type { StandardId, UnitTask } from '../../model/index.ts';
 import { depthBand } from '../../rules/index.ts';
 import { supportPositions } from '../common/supports.ts';
+import { boxConcrete, laidKNm, type BoxConcrete } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { boxLayout, webSlope, type BoxLayout } from '../concrete-box/boxLayout.ts';
 import { roundUp } from '../concrete-box/boxModel.ts';
@@ -14,11 +15,10 @@ import type { OverSupports } from './parasitic.ts';
 import { stiffDeck } from './stiffDeck.ts';
 
 /** What does not hang on the depth over the piers. */
-export interface CantileverBase {
+export interface CantileverBase extends BoxConcrete {
   readonly task: UnitTask;
   readonly standardId: StandardId;
   readonly standard: LoadStandard;
-  readonly concrete: Concrete;
   /** Box of the depth at midspan. */
   readonly layout: BoxLayout;
   readonly supportsM: readonly number[];
@@ -38,9 +38,9 @@ export interface CantileverModel extends CantileverBase {
   readonly pierDepthM: number;
   /** The same by support. */
   readonly depthsM: ReadonlyMap<number, number>;
-  /** Stiffness 1 at midspan; inertia over that at midspan at the stations. */
+  /** Stiffness 1 at midspan, less in lightweight concrete; that stiffness at the stations. */
   readonly beam: LineBeam;
-  readonly inertia: Float64Array;
+  readonly stiffness: Float64Array;
   /** Arm of each station (-1 in a single span), way from its pier to the end of the haunch, depth there, m. */
   readonly armAt: Int16Array;
   readonly way: Float64Array;
@@ -72,7 +72,7 @@ export function cantileverBase(task: UnitTask): CantileverBase {
     task,
     standardId,
     standard: loadStandard(standardId),
-    concrete: concrete(standardId, materials.concreteDefaultMPa[standardId].box),
+    ...boxConcrete(task),
     layout,
     supportsM,
     lengthM: supportsM[supportsM.length - 1]!,
@@ -98,7 +98,7 @@ export function cantileverModel(
   const { task, arms, supportsM, layout } = base;
   const { mostM, mostOverDepth } = cantileverData.bottomSlab;
   const depthsM = pierDepths(arms, task.depthM, pierDepthM);
-  const { beam, inertia, traffic, overSupports } = stiffDeck(task, arms, pierDepthM / task.depthM, power);
+  const { beam, stiffness, traffic, overSupports } = stiffDeck(base, pierDepthM / task.depthM, power);
   const n = beam.xM.length;
   const armAt = new Int16Array(n);
   const way = new Float64Array(n);
@@ -116,13 +116,13 @@ export function cantileverModel(
     pierDepthM,
     depthsM,
     beam,
-    inertia,
+    stiffness,
     armAt,
     way,
     depthM,
     overSupports,
     towardsPiers: towardsPiers(arms, armAt, beam),
-    superimposed: uniform(beam, task.deck.superimposedKNm),
+    superimposed: uniform(beam, laidKNm(task)),
     traffic,
     warmKNm: imposedCurvature(
       beam,

@@ -2,6 +2,7 @@ import type { Descriptor } from '../../model/index.ts';
 import { formManual } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { acrossFigures } from '../concrete-box/acrossFigures.ts';
+import { concreteFigures } from '../concrete-box/concreteFigures.ts';
 import { strutFigures } from '../concrete-box/strutFigures.ts';
 import { cantileverCheckFigures } from './checkFigures.ts';
 import { stages, tendons, type Row } from './stageFigures.ts';
@@ -119,5 +120,6 @@ export const cantileverFigures: readonly Descriptor[] = [
   ...cantileverCheckFigures,
   ...slabCheckFigures(manual, 'topSlabMidM'),
   ...acrossFigures(manual),
+  ...concreteFigures(manual),
   ...strutFigures(manual),
 ];

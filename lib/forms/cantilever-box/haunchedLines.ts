@@ -1,6 +1,7 @@
 import type { MeasuredLine } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
 import { acrossLines, diaphragmForms, strandKg, strutLines } from '../concrete-box/boxLines.ts';
+import { lightM3, madeLines } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import { strutsM3M } from '../concrete-box/struts.ts';
@@ -64,10 +65,11 @@ export function haunchedLines(model: CantileverModel, box: SizedHaunched): Measu
     measured('deck', 'prestress', familyKg(model, strands), what, how);
   const lines = [
     concrete(
-      weight.boxM3,
+      weight.boxM3 - lightM3(model, model.beam.xM, box.sections.areaM2),
       'box',
       `${layout.cells} ${layout.cells === 1 ? 'cell' : 'cells'}, ${task.depthM.toFixed(2)} to ${model.pierDepthM.toFixed(2)} m deep, webs ${mm(t.webM)} to ${mm(t.supportWebM)}, bottom slab ${mm(t.bottomM)} to ${mm(t.pierBottomM)} mm`,
     ),
+    ...madeLines(model, model.beam.xM, box.sections.areaM2),
     concrete(
       weight.blistersM3,
       'blisters and joints',

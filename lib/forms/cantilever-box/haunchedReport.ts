@@ -1,5 +1,6 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { middleStation } from '../common/middleStation.ts';
+import { madeFigures } from '../concrete-box/boxConcrete.ts';
 import { strutBarsKg, strutFigures } from '../concrete-box/boxReport.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
@@ -95,6 +96,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     barsKgM3: (haunchedBars(model, box).totalKg + strutBarsKg(layout.struts, strutsM3, lengthM)) / concreteM3,
     strandKgM2: strandTotalKg(model, box) / areaM2,
   };
+  Object.assign(figures, madeFigures(model, beam.xM, sections.areaM2));
   for (let span = 0; span < task.spansM.length; span++) {
     const middle = middleStation(beam, span);
     figures[`span${span + 1}OwnKNm`] = weight.lastingKNm[middle]!;

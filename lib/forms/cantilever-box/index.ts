@@ -29,6 +29,7 @@ export const cantileverBox: FormModule = {
     { kind: 'flanked', approach: 'composite-i', side: [0.55, 0.7] },
   ],
   methods: ['balanced-cantilever'],
+  readsConcrete: true,
   choices: ['transverse', 'struts'],
   variants: (spansM, deck, method) =>
     wideBoxVariants(spansM, deck, method, midspanDepthBand('cantilever-box')![1]),

@@ -1,3 +1,4 @@
+import { ofElement } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { roundUp } from '../concrete-box/boxModel.ts';
 import { thicker } from '../concrete-box/sizeBox.ts';
@@ -72,7 +73,9 @@ function workOut(model: CantileverModel, thicknesses: Thicknesses, before: Found
     found,
     stresses: haunchedStresses(model, sections, weight, found),
     shear,
-    webs: shear.demands.map((demand, e) => webShear(model, webOf(sections, e), webDuctM(), demand)),
+    webs: shear.demands.map((demand, e) =>
+      webShear(ofElement(model, e), webOf(sections, e), webDuctM(), demand),
+    ),
   };
 }
 
@@ -105,7 +108,7 @@ function grow(model: CantileverModel, box: Unbent): Thicknesses {
     Math.max(model.armAt[i]! >= 0 ? webShareOnArm(model.way[i]!) : 0, webShareAtEnd(model, i));
   box.shear.demands.forEach((demand, e) => {
     const now = webOf(sections, e);
-    const need = Math.min(most, webNeeded(model, now, webDuctM(), demand));
+    const need = Math.min(most, webNeeded(ofElement(model, e), now, webDuctM(), demand));
     if (!(need > now + 1e-9)) return;
     const share = (webShare(e) + webShare(e + 1)) / 2;
     if (share < leastShare) webM = Math.max(webM, roundUp(need));

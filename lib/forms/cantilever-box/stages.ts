@@ -7,6 +7,7 @@ import {
   type CantileverMoments,
   type Effects,
 } from '../../mechanics/index.ts';
+import { weightAlong, weightOver } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { diaphragmM3 } from '../concrete-box/boxLoads.ts';
 import { strutsM3M } from '../concrete-box/struts.ts';
@@ -60,9 +61,10 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   const { share } = boxData.blisters;
   const gamma = standard.unitWeights.concreteKNm3;
   const weight = gamma * (1 + share);
+  const weights = weightAlong(model, beam.xM).map((kNm3) => kNm3 * (1 + share));
   const strutsKNm = (depthM: number): number =>
     gamma * strutsM3M(model.layout.struts, depthM, model.layout.slope);
-  const loadKNm = sections.areaM2.map((area, i) => weight * area + strutsKNm(model.depthM[i]!));
+  const loadKNm = sections.areaM2.map((area, i) => weights[i]! * area + strutsKNm(model.depthM[i]!));
   const n = loadKNm.length;
   const atOnce = distributed(beam, loadKNm);
   const longest = arms.length > 0 ? Math.max(...arms.map(({ armM }) => armM)) : 0;
@@ -73,7 +75,7 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   const { overSegment, leastKN, mostKN: heaviestTraveller } = cantileverData.traveller;
   const travellerKN = Math.min(heaviestTraveller, Math.max(leastKN, overSegment * heaviestKN));
 
-  const free = freeArms(model, sections, weight, strutsKNm, travellerKN, segmentM);
+  const free = freeArms(model, sections, strutsKNm, travellerKN, segmentM);
   const cantileverKNm = new Float64Array(n);
   const armOf = Array.from({ length: n - 1 }, (_, e) => armWith(arms, (beam.xM[e]! + beam.xM[e + 1]!) / 2));
   for (let i = 0; i < n; i++) {
@@ -159,15 +161,29 @@ function armWith(arms: readonly Arm[], xM: number): Arm | undefined {
 function freeArms(
   model: CantileverModel,
   sections: HaunchedSections,
-  weight: number,
   strutsKNm: (depthM: number) => number,
   travellerKN: number,
   segmentM: number,
 ): Map<Arm, CantileverMoments> {
+  const { share } = boxData.blisters;
   const made = new Map<string, CantileverMoments>();
   return new Map(
     model.arms.map((arm) => {
-      const key = [model.depthsM.get(arm.support), arm.armM, arm.haunchM].map((v) => v!.toFixed(6)).join();
+      // Lightweight concrete is not the same in every span.
+      const key = [
+        model.depthsM.get(arm.support),
+        arm.armM,
+        arm.haunchM,
+        model.light ? arm.side * arm.pierM : 0,
+      ]
+        .map((v) => v!.toFixed(6))
+        .join();
+      const slice = arm.armM / armStations / 2;
+      const weightKNm3 = (fromPierM: number): number => {
+        const a = arm.pierM + arm.side * Math.max(0, fromPierM - slice);
+        const b = arm.pierM + arm.side * Math.min(arm.armM, fromPierM + slice);
+        return (1 + share) * weightOver(model, Math.min(a, b), Math.max(a, b));
+      };
       const areaM2 = sections.armAreaM2.get(arm.support)!;
       const at =
         made.get(key) ??
@@ -177,7 +193,10 @@ function freeArms(
             weightKNm: (fromPierM) => {
               const way = Math.min(1, fromPierM / arm.haunchM);
               const deeperM = model.depthsM.get(arm.support)! - model.task.depthM;
-              return weight * areaM2(way) + strutsKNm(model.task.depthM + deeperM * haunchShare(way));
+              return (
+                weightKNm3(fromPierM) * areaM2(way) +
+                strutsKNm(model.task.depthM + deeperM * haunchShare(way))
+              );
             },
             travellerKN,
             segmentM: Math.min(segmentM, arm.armM),

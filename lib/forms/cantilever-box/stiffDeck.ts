@@ -1,17 +1,18 @@
 import { trafficOnDeck } from '../../actions/index.ts';
 import { lineBeam, type LineBeam } from '../../mechanics/index.ts';
 import type { UnitTask } from '../../model/index.ts';
+import { stiffnessAt, type BoxConcrete } from '../concrete-box/boxConcrete.ts';
 import { trafficOnBox, type BoxTraffic } from '../concrete-box/boxTraffic.ts';
 import { supportPositions } from '../common/supports.ts';
 import { tipsM, type Arm } from './arms.ts';
 import { haunchShare, pierDepths, placeAt } from './haunch.ts';
 import { overSupports, type OverSupports } from './parasitic.ts';
 
-/** Line beam of a haunched deck with the traffic on it. Its stiffness is 1 at midspan. */
+/** Line beam of a haunched deck with the traffic on it. Its stiffness is 1 at midspan, less in lightweight concrete. */
 export interface StiffDeck {
   readonly beam: LineBeam;
-  /** Inertia over that at midspan, at the stations. */
-  readonly inertia: Float64Array;
+  /** That stiffness at the stations. */
+  readonly stiffness: Float64Array;
   readonly traffic: BoxTraffic;
   readonly overSupports: OverSupports;
 }
@@ -27,32 +28,40 @@ const kept = new Map<string, StiffDeck>();
  * @param power of the depth by which the inertia grows
  */
 export function stiffDeck(
-  task: UnitTask,
-  arms: readonly Arm[],
+  { task, arms, ...box }: BoxConcrete & { readonly task: UnitTask; readonly arms: readonly Arm[] },
   depthRatio: number,
   power: number,
 ): StiffDeck {
   const ratio = Math.round(10 * depthRatio) / 10;
   const exponent = Math.round(4 * power) / 4;
-  const key = JSON.stringify([task.standard, task.spansM, task.deck, ratio, exponent]);
+  const key = JSON.stringify([
+    task.standard,
+    task.spansM,
+    task.deck,
+    ratio,
+    exponent,
+    task.light,
+    task.strengthMPa,
+  ]);
   const known = kept.get(key);
   if (known) return known;
   const supportsM = supportPositions(task.spansM);
   const depths = pierDepths(arms, 1, ratio);
-  const inertiaAt = (xM: number): number => {
+  const stiffness = (xM: number): number => {
     const { arm, way } = placeAt(arms, supportsM, xM);
-    if (arm < 0) return 1;
-    return (1 + (depths.get(arms[arm]!.support)! - 1) * haunchShare(way)) ** exponent;
+    const concrete = stiffnessAt(box, xM);
+    if (arm < 0) return concrete;
+    return concrete * (1 + (depths.get(arms[arm]!.support)! - 1) * haunchShare(way)) ** exponent;
   };
   const beam = lineBeam({
     spansM: task.spansM,
-    eiKNm2: inertiaAt,
+    eiKNm2: stiffness,
     stationsPerSpan,
     extraStationsM: tipsM(arms, task.spansM, stationsPerSpan),
   });
   const made: StiffDeck = {
     beam,
-    inertia: beam.xM.map(inertiaAt),
+    stiffness: beam.xM.map(stiffness),
     overSupports: overSupports(beam),
     traffic: trafficOnBox(beam, trafficOnDeck(task.standard, task.deck)),
   };

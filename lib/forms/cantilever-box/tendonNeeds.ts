@@ -78,9 +78,10 @@ export function withParasitic(
   const above = new Float64Array(n);
   const below = new Float64Array(n);
   for (let i = 0; i < n; i++) {
-    above[i] = (top[i]! * stresses.top.lastingMPa * kN * (sections.topM[i]! - topCover)) / model.inertia[i]!;
+    above[i] =
+      (top[i]! * stresses.top.lastingMPa * kN * (sections.topM[i]! - topCover)) / model.stiffness[i]!;
     below[i] =
-      (-bottom[i]! * stresses.bottom.lastingMPa * kN * (sections.lowM[i]! - lowCover)) / model.inertia[i]!;
+      (-bottom[i]! * stresses.bottom.lastingMPa * kN * (sections.lowM[i]! - lowCover)) / model.stiffness[i]!;
   }
   return {
     top,

@@ -7,6 +7,7 @@ const number = z.number();
 
 const schema = z.object({
   layout: z.object({ overhangOverSpacing: number, mostWebSpacingM: number, source }),
+  ballast: z.object({ weightKNm3: number, source }),
   across: z.object({
     mostWebSpacingM: number,
     axisM: number,

@@ -2,6 +2,7 @@ import { materials } from '../../actions/index.ts';
 import type { MeasuredLine } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
 import { boxBars } from './boxBars.ts';
+import { lightM3, madeLines } from './boxConcrete.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { Outline } from './boxOutline.ts';
@@ -23,10 +24,11 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
   const draped = tendons.strandsPerWeb * layout.webs;
   const lines = [
     concrete(
-      own.boxM3,
+      own.boxM3 - lightM3(model, model.beam.xM, sections.areaM2),
       'box',
       `${layout.cells} ${layout.cells === 1 ? 'cell' : 'cells'}, webs ${mm(t.webM)} to ${mm(t.supportWebM)}, bottom slab ${mm(t.bottomM)} to ${mm(t.pierBottomM)}, top slab ${mm(layout.slab.midM)} to ${mm(layout.slab.rootM)} mm`,
     ),
+    ...madeLines(model, model.beam.xM, sections.areaM2),
     concrete(
       own.blistersM3,
       'blisters and joints',

@@ -1,4 +1,5 @@
 import { distributed, type Effects } from '../../mechanics/index.ts';
+import { weightAlong } from './boxConcrete.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxSection } from './boxSection.ts';
@@ -19,12 +20,12 @@ export interface OwnWeight {
 
 /** Weight by the sections along the deck; diaphragms stand on their supports and bend nothing. */
 export function ownWeight(model: BoxModel, sections: SectionsAlong): OwnWeight {
-  const { beam, standard } = model;
+  const { beam } = model;
   const { share } = boxData.blisters;
-  const gamma = standard.unitWeights.concreteKNm3;
+  const gamma = weightAlong(model, beam.xM);
   const { layout, task } = model;
   const struts = strutsM3M(layout.struts, task.depthM, layout.slope);
-  const loadKNm = sections.areaM2.map((area) => gamma * ((1 + share) * area + struts));
+  const loadKNm = sections.areaM2.map((area, i) => gamma[i]! * ((1 + share) * area + struts));
   let boxM3 = 0;
   for (let e = 0; e < loadKNm.length - 1; e++)
     boxM3 += ((sections.areaM2[e]! + sections.areaM2[e + 1]!) / 2) * (beam.xM[e + 1]! - beam.xM[e]!);

@@ -1,7 +1,8 @@
-import { concrete, loadStandard, materials, type Concrete, type LoadStandard } from '../../actions/index.ts';
+import { loadStandard, type LoadStandard } from '../../actions/index.ts';
 import { imposedCurvature, lineBeam, uniform, type Effects, type LineBeam } from '../../mechanics/index.ts';
 import type { StandardId, UnitTask } from '../../model/index.ts';
 import { supportPositions } from '../common/supports.ts';
+import { boxConcrete, laidKNm, stiffnessAt, type BoxConcrete } from './boxConcrete.ts';
 import { boxData } from './boxData.ts';
 import { boxLayout, type BoxLayout } from './boxLayout.ts';
 import { boxTraffic, type BoxTraffic } from './boxTraffic.ts';
@@ -9,16 +10,17 @@ import { sharePowers } from './tendonShare.ts';
 import { tendonShapes, type TendonShapes } from './tendonShape.ts';
 
 /** Everything about a box that does not change while its thicknesses and tendons are sought. */
-export interface BoxModel {
+export interface BoxModel extends BoxConcrete {
   readonly task: UnitTask;
   readonly standardId: StandardId;
   readonly standard: LoadStandard;
-  readonly concrete: Concrete;
   readonly layout: BoxLayout;
   readonly supportsM: readonly number[];
   readonly lengthM: number;
-  /** Line beam of constant stiffness 1: forces do not depend on it, deflections are divided by EI. */
+  /** Line beam of stiffness 1, less in lightweight concrete: forces do not depend on the whole, deflections are divided by EI. */
   readonly beam: LineBeam;
+  /** That stiffness at the stations. */
+  readonly stiffness: Float64Array;
   /** 1 over inner supports and over all supports, falling to 0 at a fifth of the span; at the stations. */
   readonly pierShare: Float64Array;
   readonly supportShare: Float64Array;
@@ -40,7 +42,9 @@ export function boxModel(task: UnitTask): BoxModel {
   const { spansM, standard: standardId, depthM } = task;
   const standard = loadStandard(standardId);
   const layout = boxLayout(task);
-  const beam = lineBeam({ spansM });
+  const made = boxConcrete(task);
+  const beam = lineBeam({ spansM, ...(made.light ? { eiKNm2: (xM: number) => stiffnessAt(made, xM) } : {}) });
+  const stiffness = beam.xM.map((xM) => stiffnessAt(made, xM));
   const supportsM = supportPositions(spansM);
   const shares = shareOfSupports(spansM, beam);
   const launched = task.method === 'launch';
@@ -50,16 +54,17 @@ export function boxModel(task: UnitTask): BoxModel {
     task,
     standardId,
     standard,
-    concrete: concrete(standardId, materials.concreteDefaultMPa[standardId].box),
+    ...made,
     layout,
     supportsM,
     lengthM: supportsM[supportsM.length - 1]!,
     beam,
+    stiffness,
     ...shares,
-    superimposed: uniform(beam, task.deck.superimposedKNm),
+    superimposed: uniform(beam, laidKNm(task)),
     traffic: boxTraffic(task, beam),
     archedKNm: imposedCurvature(beam, new Float64Array(beam.xM.length).fill(-1)).momentKNm,
-    tendonShapes: sharePowers(spansM).map((power) => tendonShapes(spansM, beam, power)),
+    tendonShapes: sharePowers(spansM).map((power) => tendonShapes(spansM, beam, power, stiffness)),
     strandM2: boxData.strandAreaMm2[standardId] * 1e-6,
     leastWebM: launched ? boxData.webLeastLaunchedM[standardId] : boxData.webLeastM[standardId],
     leastBottomM: roundUp(

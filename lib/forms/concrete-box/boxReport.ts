@@ -1,6 +1,7 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
+import { madeFigures } from './boxConcrete.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SizedBox } from './sizeBox.ts';
 import { strutsM3M, type Struts } from './struts.ts';
@@ -91,6 +92,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
       strandKg(model, tendons.strandsPerWeb * layout.webs * tendons.meanShare + tendons.straightStrands) /
       areaM2,
   };
+  Object.assign(figures, madeFigures(model, beam.xM, sections.areaM2));
   for (let span = 0; span < task.spansM.length; span++) {
     const middle = (beam.supportAt[span]! + beam.supportAt[span + 1]!) >> 1;
     figures[`span${span + 1}OwnKNm`] = own.effects.momentKNm[middle]!;

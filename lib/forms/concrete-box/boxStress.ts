@@ -1,4 +1,4 @@
-import { concrete, type TrafficEnvelope } from '../../actions/index.ts';
+import { concrete, type Concrete, type TrafficEnvelope } from '../../actions/index.ts';
 import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
@@ -23,6 +23,8 @@ export interface Compressions {
 
 /** What stresses ask to know of a deck and of its tendons. */
 export type StressModel = Pick<BoxModel, 'standardId' | 'concrete' | 'superimposed' | 'pierShare'> & {
+  /** Lightweight concrete of a part of it. */
+  readonly light?: Concrete | null;
   readonly traffic: { readonly most: Pick<TrafficEnvelope, 'momentMaxKNm' | 'momentMinKNm'> };
 };
 export type StressingTendons = Pick<
@@ -49,7 +51,8 @@ export function boxCompressions(
     transfer: transfer * strengthAtTransfer * fck,
   };
   const nil: StressUse = { use: 0, stressMPa: 0, limitMPa: limits.total };
-  const young = concrete(model.standardId, strengthAtTransfer * fck).fctmMPa;
+  const weaker = model.light ? model.light.fctmMPa / model.concrete.fctmMPa : 1;
+  const young = weaker * concrete(model.standardId, strengthAtTransfer * fck).fctmMPa;
   const out = { pierSoffit: nil, spanSoffit: nil, top: nil, freshTension: { ...nil, limitMPa: young } };
   const note = (place: keyof typeof out, stressKPa: number, limitMPa: number): void => {
     const use = stressKPa / 1e3 / limitMPa;

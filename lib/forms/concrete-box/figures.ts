@@ -3,6 +3,7 @@ import { acrossFigures } from './acrossFigures.ts';
 import { formManual, linesOf, spansOf } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { boxCheckFigures } from './checkFigures.ts';
+import { concreteFigures } from './concreteFigures.ts';
 import { strutFigures } from './strutFigures.ts';
 import { tendonFigures } from './tendonFigures.ts';
 
@@ -244,5 +245,6 @@ export const boxFigures: readonly Descriptor[] = [
   ...boxCheckFigures,
   ...slabCheckFigures(manual, 'topSlabMidM'),
   ...acrossFigures(manual),
+  ...concreteFigures(manual),
   ...strutFigures(manual),
 ];

@@ -25,6 +25,7 @@ export const concreteBox: FormModule = {
   name: 'Concrete box',
   pattern: { kind: 'continuous' },
   methods: ['falsework', 'launch'],
+  readsConcrete: true,
   choices: ['transverse', 'struts'],
   variants: (spansM, deck, method) =>
     wideBoxVariants(

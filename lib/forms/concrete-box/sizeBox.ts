@@ -1,4 +1,5 @@
 import { blockDepth } from './bendingCapacity.ts';
+import { ofElement } from './boxConcrete.ts';
 import { boxData } from './boxData.ts';
 import { ownWeight, type OwnWeight } from './boxLoads.ts';
 import { roundUp, type BoxModel } from './boxModel.ts';
@@ -71,7 +72,9 @@ function workOut(model: BoxModel, thicknesses: Thicknesses, before: Tendons | nu
     tendons,
     compressions: boxCompressions(model, sections, own, tendons),
     shear,
-    webs: shear.demands.map((demand, e) => webShear(model, elementWebM(sections, e), ductM, demand)),
+    webs: shear.demands.map((demand, e) =>
+      webShear(ofElement(model, e), elementWebM(sections, e), ductM, demand),
+    ),
   };
 }
 
@@ -103,7 +106,7 @@ function grow(model: BoxModel, box: SizedBox, settled: boolean): Thicknesses {
   const most = boxData.webMostM.value;
   box.shear.demands.forEach((demand, e) => {
     const now = elementWebM(box.sections, e);
-    const need = Math.min(most, webNeeded(model, now, tendons.group.ductM, demand));
+    const need = Math.min(most, webNeeded(ofElement(model, e), now, tendons.group.ductM, demand));
     if (!(need > now + 1e-9)) return;
     const share = (model.supportShare[e]! + model.supportShare[e + 1]!) / 2;
     if (share < 0.3) webM = Math.max(webM, roundUp(need));

@@ -23,7 +23,7 @@ export interface TendonLine {
  * next call.
  */
 export function tendonLine(
-  model: Pick<BoxModel, 'beam'>,
+  model: Pick<BoxModel, 'beam'> & { readonly stiffness?: Float64Array },
   sections: Pick<SectionsAlong, 'topM'> & { readonly span: Pick<BoxSection, 'topM' | 'lowM'> },
   group: Pick<TendonGroup, 'fromFaceM'>,
   { shapes, parasitic, share }: TendonShapes,
@@ -35,7 +35,7 @@ export function tendonLine(
   const shift = sections.topM.map((top) => topM - top);
   const shiftParasitic = imposedCurvature(
     model.beam,
-    shift.map((value, i) => -share[i]! * value),
+    shift.map((value, i) => (-share[i]! * value) / (model.stiffness?.[i] ?? 1)),
   ).momentKNm;
   const n = shift.length;
   const depthM = new Float64Array(n);

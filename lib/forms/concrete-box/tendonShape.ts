@@ -17,9 +17,15 @@ export interface TendonShapes {
 
 /**
  * Parabolas with a reverse curve over the piers. Shorter spans are draped less, with the square of the span, as their
- * loads ask for. `beam` has constant stiffness 1; `power` of the span by which strands are shared out, see `tendonShare`.
+ * loads ask for. `power` of the span by which strands are shared out, see `tendonShare`; `stiffness` is that of the beam at its
+ * stations, 1 unless given.
  */
-export function tendonShapes(spansM: readonly number[], beam: LineBeam, power = 0): TendonShapes {
+export function tendonShapes(
+  spansM: readonly number[],
+  beam: LineBeam,
+  power = 0,
+  stiffness?: Float64Array,
+): TendonShapes {
   const n = beam.xM.length;
   const shapes = [new Float64Array(n), new Float64Array(n), new Float64Array(n)] as const;
   const last = spansM.length - 1;
@@ -49,7 +55,7 @@ export function tendonShapes(spansM: readonly number[], beam: LineBeam, power = 
   for (let i = 1; i < n; i++) total += ((share[i - 1]! + share[i]!) / 2) * (beam.xM[i]! - beam.xM[i - 1]!);
   const curvature = new Float64Array(n);
   const parasitic = shapes.map((shape) => {
-    for (let i = 0; i < n; i++) curvature[i] = -share[i]! * shape[i]!;
+    for (let i = 0; i < n; i++) curvature[i] = (-share[i]! * shape[i]!) / (stiffness?.[i] ?? 1);
     return imposedCurvature(beam, curvature).momentKNm;
   });
   return {

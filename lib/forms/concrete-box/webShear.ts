@@ -74,10 +74,10 @@ function variableStruts(
   fy: number,
   { shearKN, axialMPa }: WebDemand,
 ): ShearNeed {
-  const { fckMPa, fcdMPa } = model.concrete;
+  const { fckMPa, fcdMPa, shearShare = 1 } = model.concrete;
   const pressed = Math.max(0, axialMPa) / fcdMPa;
   const alpha = pressed <= 0.25 ? 1 + pressed : pressed <= 0.5 ? 1.25 : Math.max(0, 2.5 * (1 - pressed));
-  const strut = alpha * clear * lever * 0.6 * (1 - fckMPa / 250) * fcdMPa * 1e3;
+  const strut = alpha * clear * lever * 0.6 * shearShare * (1 - fckMPa / 250) * fcdMPa * 1e3;
   const crushing = strut > 0 ? (2 * shearKN) / strut : Infinity;
   const half = crushing > 0 ? 1 / crushing : Infinity;
   const cot = Math.min(
@@ -100,7 +100,7 @@ function sectional(
   fy: number,
   { shearKN, momentKNm, strandM2, barM2 }: WebDemand,
 ): ShearNeed {
-  const { fckMPa } = model.concrete;
+  const { fckMPa, shearShare = 1 } = model.concrete;
   const { ultimateMPa, eMPa } = materials.strand.hl93;
   const stiffKN = (eMPa * strandM2 + materials.reinforcement.hl93.eMPa * barM2) * 1e3;
   const chordKN = Math.abs(momentKNm) / lever + shearKN - 0.7 * ultimateMPa * 1e3 * strandM2;
@@ -108,7 +108,7 @@ function sectional(
   const beta = 4.8 / (1 + 750 * strain);
   const cot = 1 / Math.tan(((29 + 3500 * strain) * Math.PI) / 180);
   const phi = 0.9;
-  const concreteKN = phi * 0.083 * beta * Math.sqrt(fckMPa) * clear * lever * 1e3;
+  const concreteKN = phi * 0.083 * shearShare * beta * Math.sqrt(fckMPa) * clear * lever * 1e3;
   const most = phi * 0.25 * fckMPa * clear * lever * 1e3;
   return {
     shear: Math.max(0, shearKN - concreteKN) / (lever * fy * cot),
