@@ -1,7 +1,7 @@
 import type { ArrangeRequest, Windows } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
 import type { FormId, Pattern, Site, Unit } from '../model/index.ts';
-import { endRatioWindow, spanWindow } from '../rules/index.ts';
+import { endRatioWindow, leastOfTwoSpans, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import type { FormAndMethod } from './trialRows.ts';
 
@@ -22,7 +22,8 @@ function continuousWindows(form: FormId, site: Site): Windows {
   const mostSpans = pattern.kind === 'continuous' ? pattern.mostSpans : undefined;
   // A unit of one span has no end spans.
   if (mostSpans === 1) return { ...spanBand(form, site), mostSpans };
-  const endRatio = endRatioWindow(form);
+  // Of two spans each is an end span, and the shorter is never more than the longer.
+  const endRatio = mostSpans === 2 ? ([leastOfTwoSpans(form), 1] as const) : endRatioWindow(form);
   if (endRatio === null) throw new RangeError(`no end span window in the rules of ${form}`);
   return { ...spanBand(form, site), endRatio, ...(mostSpans === undefined ? {} : { mostSpans }) };
 }

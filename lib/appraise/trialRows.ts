@@ -1,5 +1,5 @@
 import { formModule } from '../forms/index.ts';
-import type { Design, FormId, MeasuredLine, MethodId, Site } from '../model/index.ts';
+import type { Design, FormId, MeasuredLine, MethodId, Pattern, Site } from '../model/index.ts';
 import { sideRatioWindow } from '../rules/index.ts';
 import { deckOnSupport } from '../substructure/index.ts';
 import { meanClearance } from './meanClearance.ts';
@@ -34,12 +34,16 @@ export type CostOf = (lines: readonly MeasuredLine[]) => number;
 
 const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.item === 'method-setup';
 
+/** One span or two in one with their walls: tried as one span. */
+const isFrame = (pattern: Pattern): boolean =>
+  pattern.kind === 'continuous' && (pattern.mostSpans ?? Infinity) <= 2;
+
 /** A unit of ordinary proportions for one governing span: its spans, and its pylons where the form has them. */
 function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number[]; pylons?: number[] } {
   const pattern = formModule(form).pattern;
   if (pattern.kind === 'simple-main') return { spansM: [spanM] };
   if (pattern.kind === 'continuous' || pattern.kind === 'flanked') {
-    if (pattern.kind === 'continuous' && pattern.mostSpans === 1) return { spansM: [spanM] };
+    if (isFrame(pattern)) return { spansM: [spanM] };
     return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
   }
   const [least, most] =
@@ -119,8 +123,7 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
   const { joined } = formModule(form);
   /** What an end span, or one alone, works like; 1 where the trial unit is what it is. */
   const workAs = (work: (loads: DeckLoads) => number, permanentKNm: number, trafficKNm: number): number => {
-    const isOneSpan = pattern.kind === 'continuous' && pattern.mostSpans === 1;
-    if (hung || kind === 'simple-main' || isOneSpan || joined === 'never') return 1;
+    if (hung || kind === 'simple-main' || isFrame(pattern) || joined === 'never') return 1;
     // Surfacing, barriers and what else is laid on the deck come when it is whole.
     const simpleKNm = joined === 'after-placing' ? Math.max(0, permanentKNm - site.deck.superimposedKNm) : 0;
     return work({ simpleKNm, continuousKNm: permanentKNm - simpleKNm, trafficKNm });

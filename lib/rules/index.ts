@@ -9,6 +9,7 @@ export {
   depthBand,
   depthMeasure,
   endRatioWindow,
+  leastOfTwoSpans,
   floorBand,
   haunchedDepthBands,
   leastHeadroomSpareM,

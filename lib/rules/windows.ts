@@ -162,6 +162,12 @@ export function endRatioWindow(form: FormId): Interval | null {
   return window !== null && Number.isFinite(window[1]) ? window : null;
 }
 
+/** Shorter over longer span of a unit of two, the least that rules leave without a caution. @throws RangeError where no rule speaks of it */
+export function leastOfTwoSpans(form: FormId): number {
+  const window = windowOf(form, 'endSpanRatio', ['out', 'caution'], { continuity: 'continuous' });
+  return required(window, form, 'rule for unequal spans')[0];
+}
+
 /** Side span over main span of a cable-supported form with one or two pylons; null where no rule speaks of it. */
 export function sideRatioWindow(form: FormId, pylons: 1 | 2): Interval | null {
   const window = windowOf(form, 'sideSpanRatio', ['out', 'caution'], { pylons });

@@ -20,12 +20,18 @@ export function wallPath(at: At): string | null {
 }
 
 const isIntegral = (at: At): boolean => wallPath(at) !== null;
+/** A wall between two spans. */
+const isMiddle = (at: At): boolean => isIntegral(at) && at.support.kind === 'pier';
 const lineIs =
   (ending: string) =>
   (at: At): boolean =>
     isIntegral(at) && at.support.lines[at.index('line')]!.what.endsWith(ending);
-const wings = (at: At): string =>
-  `${at.foot}/lines/${at.support.lines.findIndex(({ what }) => what.endsWith('wing walls'))}/quantity`;
+/** Concrete of the wings; none of a wall between two spans. */
+const wings = (at: At): string[] =>
+  at.support.lines.flatMap(({ what }, i) =>
+    what.endsWith('wing walls') ? [`${at.foot}/lines/${i}/quantity`] : [],
+  );
+const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 
 const none = (field: string, label: string, unit: string): Descriptor =>
   described({
@@ -85,14 +91,38 @@ export const integralFigures: readonly Descriptor[] = [
     compute: ({ foot }) => foot,
   }),
   described({
+    path: support('shaft/widthM'),
+    when: isMiddle,
+    label: on('width of the wall'),
+    unit: 'm',
+    method: 'as given',
+    formula: 'width of the deck',
+    inputs: () => ({ width: 'site/deck/widthM' }),
+    compute: ({ width }) => width,
+  }),
+  described({
+    path: support('pitFromM'),
+    when: isMiddle,
+    label: on('level the pit is dug from'),
+    unit: 'm',
+    method: 'least of two levels',
+    formula: 'ground, or lower where the wall reaches down: foot of the wall + cover over the cap',
+    inputs: (at) => ({
+      ground: `${at.foot}/groundLevelM`,
+      foot: `${at.foot}/footM`,
+      cover: 'data/substructure/piles/capCoverM',
+    }),
+    compute: (v) => Math.min(v.ground, v.foot + v.cover),
+  }),
+  described({
     path: support('shaft/concreteM3'),
     when: isIntegral,
     label: on('concrete of the walls'),
     unit: 'm3',
     method: 'sum',
-    formula: 'wall of the frame + wings',
+    formula: 'wall of the frame + wings at an end',
     inputs: (at) => ({ wall: `${wallPath(at)!}/concreteM3`, wings: wings(at) }),
-    compute: (v) => v.wall + v.wings,
+    compute: (v) => sum(v.wings) + v.wall,
   }),
   described({
     path: support('shaft/reinforcementKg'),
@@ -100,13 +130,13 @@ export const integralFigures: readonly Descriptor[] = [
     label: on('bars of the walls'),
     unit: 'kg',
     method: 'sum',
-    formula: 'bars of the wall of the frame + wings x bars per m3',
+    formula: 'bars of the wall of the frame + wings at an end x bars per m3',
     inputs: (at) => ({
       wall: `${wallPath(at)!}/reinforcementKg`,
       wings: wings(at),
       perM3: abutment('barsKgM3'),
     }),
-    compute: (v) => v.wall + v.wings * v.perM3,
+    compute: (v) => v.wall + sum(v.wings) * v.perM3,
   }),
   none('bearings', 'bearings', 'no'),
   none('bearingMN', 'design load of all bearings', 'MN'),
@@ -144,7 +174,7 @@ export const integralFigures: readonly Descriptor[] = [
     method: 'product',
     formula: 'concrete of the wings x bars per m3',
     inputs: (at) => ({ wings: wings(at), perM3: abutment('barsKgM3') }),
-    compute: (v) => v.wings * v.perM3,
+    compute: (v) => sum(v.wings) * v.perM3,
   }),
   described({
     path: support('foundations/:f/lines/:line/quantity'),

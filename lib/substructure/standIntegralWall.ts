@@ -11,9 +11,9 @@ import { line, waterAccessLines } from './supportLines.ts';
 import { wingFootingLines, wingsOf, wingWallsLine } from './wings.ts';
 
 /**
- * An end of a deck whose wall is in one with it: no bearings, no joint. The wall itself stands in the lines of the design;
- * here are its wings and, on every ground, the foundation under it, sized for vertical load, thrust and moment as the
- * frame puts them down, the pressure of the fill in them, with the fill on the heel and wind across.
+ * A wall in one with the deck: no bearings, no joint. The wall itself stands in the lines of the design; here are, of one at
+ * an end, its wings, and on every ground the foundation under it, sized for vertical load, thrust and moment as the frame
+ * puts them down, the pressure of the fill in them, with the fill on the heel at an end and wind across.
  */
 export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWall): Support {
   const { abutment, piles, factors } = substructureData;
@@ -21,9 +21,11 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
   const slabM = ask.roadLevelM - constructionDepth(site.deck, 0);
   const footM = slabM - wall.heightM;
   const widthM = site.deck.widthM;
-  const wings = wingsOf(site, Math.max(0, ask.roadLevelM - footM));
-  const wingBarsKg = wings.wallsM3 * abutment.barsKgM3;
-  const acrossKN = ask.acrossKN * factors.windWithTraffic;
+  const isEnd = ask.kind === 'abutment';
+  const wings = isEnd ? wingsOf(site, Math.max(0, ask.roadLevelM - footM)) : null;
+  const wingsM3 = wings?.wallsM3 ?? 0;
+  const wingBarsKg = wingsM3 * abutment.barsKgM3;
+  const acrossKN = ask.acrossKN * (isEnd ? factors.windWithTraffic : 1);
   const task: FoundationTask = {
     name: ask.name,
     ...(ask.index === undefined ? {} : { support: ask.index }),
@@ -41,18 +43,20 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
     })),
     groundLevelM: Math.min(setting.groundLevelM, footM + piles.capCoverM),
     waterLevelM: setting.waterLevelM,
-    scourM: scourDepth(setting, 0),
-    backfill: { topLevelM: ask.roadLevelM, widthM, heelShare: abutment.heelShare, inLoads: true },
+    scourM: scourDepth(setting, isEnd ? 0 : wall.footM),
+    backfill: isEnd
+      ? { topLevelM: ask.roadLevelM, widthM, heelShare: abutment.heelShare, inLoads: true }
+      : null,
     shaftFootM: footM,
     shaftAreaM2: wall.footM * widthM,
     shaftBarsKgM3: wall.reinforcementKg / wall.concreteM3,
-    shaftItem: 'abutment-concrete',
+    shaftItem: isEnd ? 'abutment-concrete' : 'pier-concrete',
   };
   const ground = groundUnder(site, ask.chainageM);
   return {
     chainageM: ask.chainageM,
     stretch: ground.stretch,
-    kind: 'abutment',
+    kind: isEnd ? 'abutment' : 'pier',
     groundLevelM: setting.groundLevelM,
     topLevelM: ask.soffitLevelM,
     heightM: Math.max(0, ask.soffitLevelM - setting.groundLevelM),
@@ -63,7 +67,7 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
       lengthM: wall.footM,
       widthM,
       columns: 1,
-      concreteM3: wall.concreteM3 + wings.wallsM3,
+      concreteM3: wall.concreteM3 + wingsM3,
       reinforcementKg: wall.reinforcementKg + wingBarsKg,
     },
     articulation: {
@@ -76,9 +80,20 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
       tieDownKN: 0,
     },
     lines: [
-      wingWallsLine(ask, wings),
-      line(ask, 'abutments', 'reinforcement', wingBarsKg, `${ask.name} wings`, `${abutment.barsKgM3} kg/m3`),
-      ...wingFootingLines(ask, wings),
+      ...(wings
+        ? [
+            wingWallsLine(ask, wings),
+            line(
+              ask,
+              'abutments',
+              'reinforcement',
+              wingBarsKg,
+              `${ask.name} wings`,
+              `${abutment.barsKgM3} kg/m3`,
+            ),
+            ...wingFootingLines(ask, wings),
+          ]
+        : []),
       ...waterAccessLines(ask, setting.waterDepthM),
     ],
     foundations: ground.classes.map((odds) => foundationFor(task, odds)),

@@ -102,12 +102,12 @@ function foundationPiece(foundation: Foundation, atM: number, frame: Frame, styl
   return g({}, parts);
 }
 
-/** Level down to which the structure itself reaches at a support, m: the foot of a pylon leg drawn with its deck; Infinity where none is. */
+/** Level down to which the structure itself reaches at a support, m: the foot of a pylon leg or of a wall drawn with its deck; Infinity where none is. */
 function drawnDownTo(site: Site, option: AppraisedOption, chainageM: number): number {
   let lowest = Infinity;
   for (const { design, fromM } of placedUnits(option)) {
     for (const shape of design.elevation) {
-      if (!shape.part.startsWith('pylon') && !shape.part.startsWith('tower')) continue;
+      if (!/^(pylon|tower|middle wall)/u.test(shape.part)) continue;
       const xs = shape.points.map(([x]) => fromM + x);
       if (Math.min(...xs) - 0.5 > chainageM || Math.max(...xs) + 0.5 < chainageM) continue;
       lowest = Math.min(

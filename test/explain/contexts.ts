@@ -156,6 +156,35 @@ export const frame = (): Context =>
     };
   });
 
+/** The same over two unequal spans with a wall between them, kept by hand beside what is found. */
+export const frameOfTwo = (): Context =>
+  once('frameOfTwo', () => {
+    const { study } = frame();
+    const { brief, books, options } = study;
+    const [road] = brief.obstacles;
+    return {
+      ...study,
+      brief: {
+        ...brief,
+        crossing: { ...brief.crossing, endM: 138 },
+        obstacles: [road!, { ...road!, name: 'Mill Lane', fromM: 124, toM: 132, clearance: null }],
+      },
+      books: { ...books, draws: 300 },
+      options: {
+        ...options,
+        kept: [
+          {
+            number: 7,
+            form: 'portal-frame',
+            method: 'falsework',
+            units: [{ form: 'portal-frame', role: 'main', supportsM: [100, 120.5, 138] }],
+            depthM: null,
+          },
+        ],
+      },
+    };
+  });
+
 /** The crossing with a wide deck under HL-93, its options kept by hand in every way that a form leaves open. */
 export const variants = (): Context =>
   once('variants', () => {

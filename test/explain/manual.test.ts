@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { figure as figureAt, figurePaths, rebuilt, type Context } from '../../lib/explain/index.ts';
 import type { Figure } from '../../lib/model/index.ts';
 import { bibliography } from '../../lib/rules/index.ts';
-import { example, frame, inFlood, inWindows, otherwise, variants } from './contexts.ts';
+import { example, frame, frameOfTwo, inFlood, inWindows, otherwise, variants } from './contexts.ts';
 
 /** Name, study, and how many figures it has at the least. */
 const contexts: readonly (readonly [name: string, context: () => Context, least: number])[] = [
@@ -11,6 +11,7 @@ const contexts: readonly (readonly [name: string, context: () => Context, least:
   ['the crossing in a known flood', inFlood, 1000],
   ['abutments that stand in their windows', inWindows, 1000],
   ['a portal frame', frame, 300],
+  ['a portal frame of two spans', frameOfTwo, 300],
   ['options made in every way', variants, 500],
 ];
 

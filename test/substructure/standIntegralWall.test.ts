@@ -84,3 +84,21 @@ it('standSupports(frame) slides nowhere: thrust within 0.4 of the vertical load 
   for (const { verticalKN, alongKN } of frame().walls![0]!.loads)
     expect(Math.abs(alongKN)).toBeLessThan(0.4 * (verticalKN + fill + own));
 });
+
+it('standSupports(frame of two spans) has a wall between them: no wings, no fill on its heel, a footing on its middle', () => {
+  const design = portalFrame.size({ ...frame().task, spansM: [12, 12], clearUnderM: [8.75, 8.75, 8.75] });
+  const supports = standSupports(site, [{ ...unitOn([0, 12, 24]), form: 'portal-frame' }], [design], profile);
+  expect(supports.map(({ kind }) => kind)).toEqual(['abutment', 'pier', 'abutment']);
+  const [first, middle] = supports as [Support, Support, Support];
+  expect(middle.articulation).toMatchObject({ bearings: 0, jointMovementMm: 0, fixed: true });
+  expect(middle.lines.some(({ what }) => /wing|bearing|column|leaf/u.test(what))).toBe(false);
+  expect(middle.shaft.concreteM3).toBe(design.walls![1]!.concreteM3);
+  expect(middle.foundations.map(({ kind }) => kind)).toEqual(first.foundations.map(({ kind }) => kind));
+  // Equal spans and no fill to hold: a smaller footing than at an end, for more load.
+  expect(middle.permanentKN).toBeGreaterThan(first.permanentKN);
+  const plan = ({ foundations }: Support): number =>
+    foundations[0]!.footing.lengthM * foundations[0]!.footing.widthM;
+  expect(plan(middle)).toBeLessThan(plan(first));
+  const lines = measure(site, [design], supports, profile);
+  expect(sum(lines, 'pier-concrete')).toBeCloseTo(design.walls![1]!.concreteM3, 9);
+});

@@ -9,6 +9,7 @@ const actions = [
   'kneeDepthM',
   'wallTopM',
   'firstHeightM',
+  'middleHeightM',
   'lastHeightM',
   './task/deck/superimposedKNm',
 ] as const;
@@ -50,6 +51,7 @@ export const portalChecks: readonly Descriptor[] = [
   ...bending('knee', 'kneeOwnKNm', 'kneeOwnSoftKNm'),
   ...bending('wall', 'kneeOwnKNm', 'kneeOwnSoftKNm'),
   ...bending('wall-inner', 'thrustOwnKN'),
+  ...bending('wall-middle', 'middleOwnKNm', 'middleOwnSoftKNm'),
   ...['shear', 'shear-walls'].flatMap((id) =>
     check(
       id,

@@ -112,7 +112,7 @@ export function combinations(
 /** Characteristic braking force of the deck, kN. */
 export function brakingOf({ standard, task, shape }: FrameModel): number {
   const { perLane, constantKN, perMKN, leastKN, mostKN } = standard.braking;
-  const one = Math.min(mostKN, Math.max(leastKN, constantKN + perMKN * shape.spanM));
+  const one = Math.min(mostKN, Math.max(leastKN, constantKN + perMKN * shape.lengthM));
   return perLane ? one * Math.max(1, Math.ceil(task.deck.lanes / 2)) : one;
 }
 

@@ -14,12 +14,14 @@ const frame = [
   'wallTopM',
   'wallFootM',
   'firstHeightM',
+  'middleHeightM',
   'lastHeightM',
 ] as const;
 const onFeet = ['data/portal-frame/foot/stiffKNm3', 'data/portal-frame/foot/lengthOverHeight'] as const;
 const onSoft = ['data/portal-frame/foot/softKNm3', 'data/portal-frame/foot/lengthOverHeight'] as const;
 const deckBars = ['soffit along', 'top along', 'across', 'links', 'chairs and details'];
-const wallBars = ['first wall upright', 'first wall level', 'last wall upright', 'last wall level'];
+const walls = ['first wall', 'middle wall', 'last wall'];
+const wallBars = walls.flatMap((wall) => [`${wall} upright`, `${wall} level`]);
 const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/widthM` }) as const;
 const ends = ['first', 'last'] as const;
 const clear = (at: At): string[] =>
@@ -60,7 +62,7 @@ export const portalFigures: readonly Descriptor[] = [
     'wallTopM',
     shape('footOverTop'),
   ),
-  ...ends.map((end) =>
+  ...(['first', 'middle', 'last'] as const).map((end) =>
     figure(`${end}HeightM`, {
       label: `top of the slab to top of the foundation, ${end} wall`,
       unit: 'm',
@@ -68,7 +70,7 @@ export const portalFigures: readonly Descriptor[] = [
       formula:
         'height under the deck + depth at midspan + cover of the footing; at least the shortest wall that is not too stiff + knee',
       inputs: (at) => ({
-        clear: clear(at),
+        clear: clear(at).filter((_, i, all) => i === { first: 0, middle: 1, last: all.length - 1 }[end]),
         depth: `${at.unit}/task/depthM`,
         knee: `${at.unit}/figures/kneeDepthM`,
         spans: spansOf(at),
@@ -79,8 +81,8 @@ export const portalFigures: readonly Descriptor[] = [
       }),
       compute: (v) =>
         Math.max(
-          Math.max(v.least, v.share * sum(v.spans)) + v.knee,
-          (v.clear[end === 'first' ? 0 : v.clear.length - 1] ?? v.assumed) + v.depth + v.below,
+          Math.max(v.least, v.share * Math.max(...v.spans)) + v.knee,
+          (v.clear[0] ?? v.assumed) + v.depth + v.below,
         ),
     }),
   ),
@@ -105,6 +107,20 @@ export const portalFigures: readonly Descriptor[] = [
   statics(
     'midspanOwnSoftKNm',
     'own-weight moment at midspan, soft feet',
+    'kNm',
+    'plane frame, feet turn freely',
+    onSoft,
+  ),
+  statics(
+    'middleOwnKNm',
+    'own-weight moment over the middle wall, on the side of the last span, stiff feet',
+    'kNm',
+    'plane frame',
+    onFeet,
+  ),
+  statics(
+    'middleOwnSoftKNm',
+    'own-weight moment over the middle wall, on the side of the last span, soft feet',
     'kNm',
     'plane frame, feet turn freely',
     onSoft,
@@ -144,7 +160,7 @@ export const portalFigures: readonly Descriptor[] = [
       label: `pressure of fill pressed by the warm deck, K*, ${where}`,
       unit: '',
       method: 'ratcheting of the fill',
-      formula: 'K0 + Kp (C x share x expansion x range x span / 2 / H)^power, H the lower wall',
+      formula: 'K0 + Kp (C x share x expansion x range x length / 2 / H)^power, H the lower outer wall',
       inputs: (at) => ({
         rest: 'data/portal-frame/earth/restPressure',
         passive: 'data/portal-frame/earth/passivePressure',
@@ -174,10 +190,12 @@ export const portalFigures: readonly Descriptor[] = [
       label,
       unit: 'kN',
       method: 'greatest of the combinations',
-      formula: 'of both walls, characteristic; 0 where none pushes that way',
+      formula: 'of the outer walls, characteristic; 0 where none pushes that way',
       inputs: (at) => ({
-        loads: at.design.walls!.flatMap(({ loads }, w) =>
-          loads.map((_, k) => `${at.unit}/walls/${w}/loads/${k}/alongKN`),
+        loads: at.design.walls!.flatMap(({ loads }, w, all) =>
+          w === 0 || w === all.length - 1
+            ? loads.map((_, k) => `${at.unit}/walls/${w}/loads/${k}/alongKN`)
+            : [],
         ),
       }),
       compute: ({ loads }) => Math.max(0, ...loads.map((one) => sign * one)),
@@ -187,7 +205,7 @@ export const portalFigures: readonly Descriptor[] = [
     label: 'movement of each end, warm to cold, with shrinkage',
     unit: 'mm',
     method: 'product',
-    formula: '1000 x (expansion x range of temperature + shrinkage) x span / 2',
+    formula: '1000 x (expansion x range of temperature + shrinkage) x length / 2',
     inputs: (at) => ({
       expansion: 'data/portal-frame/temperature/expansion1PerK',
       warmer: 'data/portal-frame/temperature/warmerK',
@@ -228,15 +246,15 @@ export const portalFigures: readonly Descriptor[] = [
     label: 'concrete of deck and walls per m2 of deck',
     unit: 'm3/m2',
     method: 'ratio',
-    formula: '(deck + walls) / (span x deck width)',
-    inputs: (at) => ({ lines: linesOf(at, 'frame deck', 'first wall', 'last wall'), ...area(at) }),
+    formula: '(deck + walls) / (length x deck width)',
+    inputs: (at) => ({ lines: linesOf(at, 'frame deck', ...walls), ...area(at) }),
     compute: ({ lines, spans, width }) => sum(lines) / (sum(spans) * width),
   }),
   figure('deckConcreteM3M2', {
     label: 'concrete of the deck per m2 of deck',
     unit: 'm3/m2',
     method: 'ratio',
-    formula: 'deck / (span x deck width)',
+    formula: 'deck / (length x deck width)',
     inputs: (at) => ({ lines: linesOf(at, 'frame deck'), ...area(at) }),
     compute: ({ lines, spans, width }) => sum(lines) / (sum(spans) * width),
   }),
@@ -253,7 +271,7 @@ export const portalFigures: readonly Descriptor[] = [
     unit: 'kg/m3',
     method: 'ratio',
     formula: 'bars of the walls / their concrete',
-    inputs: (at) => ({ bars: linesOf(at, ...wallBars), concrete: linesOf(at, 'first wall', 'last wall') }),
+    inputs: (at) => ({ bars: linesOf(at, ...wallBars), concrete: linesOf(at, ...walls) }),
     compute: (v) => sum(v.bars) / sum(v.concrete),
   }),
   sized(
@@ -294,7 +312,7 @@ export const portalFigures: readonly Descriptor[] = [
     label: 'strand per m2 of deck',
     unit: 'kg/m2',
     method: 'ratio',
-    formula: 'tendons / (span x deck width)',
+    formula: 'tendons / (length x deck width)',
     inputs: (at) => ({ strand: linesOf(at, 'tendons'), ...area(at) }),
     compute: (v) => sum(v.strand) / (sum(v.spans) * v.width),
   }),

@@ -5,14 +5,25 @@ import { bendingCapacity, compressionDepth, strandDesignMPa } from '../concrete-
 import { crackWidthMm, serviceBars } from '../slab/crackedSection.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
 import { combinations, worstMoment, type Combination, type Combined } from './combine.ts';
-import { wallNodes, type FrameModel } from './frameModel.ts';
+import { deckDesignNodes, type FrameModel } from './frameModel.ts';
+import type { FrameWall } from './frameShape.ts';
 import type { FrameTendons } from './frameTendons.ts';
 import type { FrameTraffic } from './frameTraffic.ts';
 import { portalData } from './portalData.ts';
 
+export type FaceId =
+  | 'soffit'
+  | 'top'
+  | `${'first' | 'last'}-${'outer' | 'inner'}`
+  | `middle-${'left' | 'right'}`;
+
+/** Faces of a wall: away from the first span side and towards it, in the order outer, inner. */
+export const wallFaces = (name: FrameWall['name']): readonly [FaceId, FaceId] =>
+  name === 'middle' ? ['middle-left', 'middle-right'] : [`${name}-outer`, `${name}-inner`];
+
 /** Main bars of one face of one part, along the chain. */
 export interface FaceBars {
-  readonly id: 'soffit' | 'top' | 'first-outer' | 'first-inner' | 'last-outer' | 'last-inner';
+  readonly id: FaceId;
   readonly nodes: readonly number[];
   /** 1 the inner face (soffit), -1 the outer. */
   readonly sign: 1 | -1;
@@ -54,19 +65,16 @@ export function frameBars(
   const ultimate = combinations(model, traffic, 'ultimate', parasitic);
   const characteristic = combinations(model, traffic, 'characteristic', parasitic);
   const frequent = combinations(model, traffic, 'frequent', parasitic);
-  const { knees } = model.shape;
-  const deck = Array.from({ length: knees[1] - knees[0] - 1 }, (_, i) => knees[0] + 1 + i);
-  const first = wallNodes(model.shape, 0);
-  const last = wallNodes(model.shape, 1);
+  const deck = deckDesignNodes(model.shape);
   const face = (id: FaceBars['id'], nodes: readonly number[], sign: 1 | -1): FaceBars =>
     faceBars(model, id, nodes, sign, [ultimate, characteristic, frequent], tendons);
   return [
     face('soffit', deck, 1),
     face('top', deck, -1),
-    face('first-outer', first, -1),
-    face('first-inner', first, 1),
-    face('last-outer', last, -1),
-    face('last-inner', last, 1),
+    ...model.shape.walls.flatMap(({ name, nodes }) => {
+      const [outer, inner] = wallFaces(name);
+      return [face(outer, nodes, -1), face(inner, nodes, 1)];
+    }),
   ];
 }
 
@@ -232,16 +240,18 @@ function capacity(
   return bendingCapacity(model, steel, pressedFace(strip)) + thrustKN * (strip.centroidM - c);
 }
 
-/** Place of a node along its part, m. */
-function along(model: FrameModel, node: number): number {
+/** Length of the members from a node to a later one of the same part, m. */
+function lengthTo({ memberM, shape: { chainNodes } }: FrameModel, from: number, to: number): number {
+  // Behind the chain a member starts at the node after its number.
+  const late = from >= chainNodes ? 1 : 0;
   let s = 0;
-  for (let e = 0; e < node; e++) s += model.memberM[e]!;
+  for (let e = from - late; e < to - late; e++) s += memberM[e]!;
   return s;
 }
 
 /**
  * Bars as placed: the least of a slab everywhere, half of the peak where more is needed and all of it where more than half
- * is, run on by the effective depth and an anchorage; the top of the deck apart for each knee.
+ * is, run on by the effective depth and an anchorage; the top of the deck apart for each wall.
  */
 function placed(
   model: FrameModel,
@@ -251,15 +261,15 @@ function placed(
   barM: number,
   halves: boolean,
 ): Float64Array {
-  const s = nodes.map((node) => along(model, node));
+  const s = nodes.map((node) => lengthTo(model, nodes[0]!, node));
   const least = nodes.map((node) => {
     const { depthM, outerWidthM, innerWidthM } = model.shape.sections[node]!;
     return slabData.steelRatioLeast.value * depthM * Math.min(outerWidthM, innerWidthM);
   });
   const out = Float64Array.from(least);
   const runOnM = effectiveM + slabDeckData.bars.anchorDiameters * barM;
-  const middle = nodes.length >> 1;
-  const groups = halves ? [nodes.slice(0, middle + 1), nodes.slice(middle)] : [nodes];
+  const cuts = halves ? model.shape.middles.map((node) => nodes.indexOf(node)) : [];
+  const groups = [0, ...cuts].map((from, g) => nodes.slice(from, (cuts[g] ?? nodes.length - 1) + 1));
   for (const group of groups) {
     const index = group.map((node) => nodes.indexOf(node));
     const peak = Math.max(...index.map((i) => needM2[i]!));
@@ -282,7 +292,7 @@ function volume(
 ): number {
   let sum = 0;
   for (let i = 0; i < nodes.length - 1; i++)
-    sum += ((placedM2[i]! + placedM2[i + 1]!) / 2) * model.memberM[nodes[i]!]!;
+    sum += ((placedM2[i]! + placedM2[i + 1]!) / 2) * lengthTo(model, nodes[i]!, nodes[i + 1]!);
   const anchorM = slabDeckData.bars.anchorDiameters * barM + depthM / 2;
   return sum + (placedM2[0]! + placedM2[placedM2.length - 1]!) * anchorM;
 }

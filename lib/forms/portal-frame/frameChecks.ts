@@ -26,6 +26,9 @@ export function frameChecks(model: FrameModel, sized: SizedFrame): Check[] {
     ...pair('knee', 'at the knee in the deck', of('top')),
     ...pair('wall', 'in the earth face of the walls', of('first-outer', 'last-outer')),
     ...pair('wall-inner', 'in the open face of the walls', of('first-inner', 'last-inner')),
+    ...(model.task.spansM.length > 1
+      ? pair('wall-middle', 'in the middle wall', of('middle-left', 'middle-right'))
+      : []),
     check(
       'shear',
       'shear of the deck, with links where the concrete alone is not enough',
@@ -41,13 +44,17 @@ export function frameChecks(model: FrameModel, sized: SizedFrame): Check[] {
       'kN',
     ),
     check('bars-across', 'bars across for the wheels that fit', across.lowM2PerM, across.fitsM2PerM, 'm2/m'),
-    check(
-      'deflection',
-      'deflection under traffic',
-      traffic.deflectionM / (tendons ? 1 : portalData.cracked.share),
-      model.shape.spanM / model.standard.deflection.limitRatio,
-      'm',
-    ),
+    traffic.deflectionsM
+      .map((deflectionM, span) =>
+        check(
+          'deflection',
+          'deflection under traffic',
+          deflectionM / (tendons ? 1 : portalData.cracked.share),
+          model.task.spansM[span]! / model.standard.deflection.limitRatio,
+          'm',
+        ),
+      )
+      .reduce((a, b) => (b.utilisation > a.utilisation ? b : a)),
   ];
   if (tendons)
     checks.push(

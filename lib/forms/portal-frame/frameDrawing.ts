@@ -13,42 +13,37 @@ export function frameDepthAlong({ shape, deckXM }: FrameModel): DepthAlong {
 /** The frame from the side: deck with its haunches, both walls, tendons faint. */
 export function frameElevation(model: FrameModel, tendons: FrameTendons | null): Shape[] {
   const { shape, deckNodes } = model;
-  const { spanM, legTopM, legFootM, heightM, nodes, knees } = shape;
+  const { lengthM, legTopM, walls, nodes } = shape;
   const soffit = deckNodes
-    .filter((node) => node !== knees[0] && node !== knees[1])
+    .filter((node) => walls.every(({ knee: axis }) => axis !== node))
     .map((node): [number, number] => [nodes[node]![0], -depthAt(shape, nodes[node]![0])]);
   const knee = depthAt(shape, legTopM / 2);
-  const wall = (end: 0 | 1): Shape => {
-    const x = end === 0 ? 0 : spanM;
-    const z = -heightM[end];
+  const shapes: Shape[] = walls.map(({ name, xM: x, heightM, topM, footM }): Shape => {
+    const z = -heightM;
     return {
-      part: end === 0 ? 'first wall' : 'last wall',
+      part: `${name} wall`,
       material: 'concrete',
       kind: 'polygon',
       points: [
-        [x - legTopM / 2, -knee],
-        [x + legTopM / 2, -knee],
-        [x + legFootM / 2, z],
-        [x - legFootM / 2, z],
+        [x - topM / 2, -knee],
+        [x + topM / 2, -knee],
+        [x + footM / 2, z],
+        [x - footM / 2, z],
       ],
     };
-  };
-  const shapes: Shape[] = [
-    wall(0),
-    wall(1),
-    {
-      part: 'deck',
-      material: 'concrete',
-      kind: 'polygon',
-      points: [
-        [-legTopM / 2, 0],
-        [spanM + legTopM / 2, 0],
-        [spanM + legTopM / 2, -knee],
-        ...[...soffit].reverse(),
-        [-legTopM / 2, -knee],
-      ],
-    },
-  ];
+  });
+  shapes.push({
+    part: 'deck',
+    material: 'concrete',
+    kind: 'polygon',
+    points: [
+      [-legTopM / 2, 0],
+      [lengthM + legTopM / 2, 0],
+      [lengthM + legTopM / 2, -knee],
+      ...[...soffit].reverse(),
+      [-legTopM / 2, -knee],
+    ],
+  });
   if (tendons)
     shapes.push({
       part: 'tendons',
@@ -64,7 +59,7 @@ export function frameElevation(model: FrameModel, tendons: FrameTendons | null):
 /** Cross-sections at midspan and at the face of a wall. */
 export function frameSections(model: FrameModel, tendons: FrameTendons | null): SectionCut[] {
   const { shape, task } = model;
-  const { spanM, legTopM, wingM, wingRootM, knees } = shape;
+  const { legTopM, wingM, wingRootM, knees, middles } = shape;
   const cut = (at: string, xM: number, node: number): SectionCut => {
     const soffitM = task.deck.widthM - 2 * wingM;
     const pitch = tendons ? soffitM / tendons.count : 0;
@@ -97,5 +92,5 @@ export function frameSections(model: FrameModel, tendons: FrameTendons | null): 
       ],
     };
   };
-  return [cut('midspan', spanM / 2, (knees[0] + knees[1]) >> 1), cut('wall', legTopM / 2, knees[0] + 1)];
+  return [cut('midspan', task.spansM[0]! / 2, middles[0]!), cut('wall', legTopM / 2, knees[0] + 1)];
 }

@@ -5,40 +5,42 @@ import type { SizedFrame } from './sizeFrame.ts';
 /**
  * Characteristic loads on the footing of a wall, on stiff and on soft feet: with fill at rest, at its least while the warm
  * deck pushes outwards, as the warm deck presses it (K*), and with a short cold deck and traffic behind the wall; each
- * with the traffic that goes with it. Along and moments are positive towards the span.
+ * with the traffic that goes with it. Along and moments are positive towards the span, of a middle wall towards the last.
  */
-export function footLoads(model: FrameModel, { traffic, tendons }: SizedFrame, end: 0 | 1): FootLoad[] {
+export function footLoads(model: FrameModel, { traffic, tendons }: SizedFrame, wall: number): FootLoad[] {
   const { earth, temperature, shrinkage, cracked, service } = portalData;
   const held = model.prestressed ? 1 : cracked.share;
   const perK = (temperature.expansion1PerK / 1e-5) * held;
   const dry = -held * shrinkage.relaxed * (shrinkage.strain / 1e-5);
+  const { name } = model.shape.walls[wall]!;
+  const ends = name === 'first' ? [0] : name === 'last' ? [1] : [0, 1];
   return model.cases.flatMap((one, k) => {
-    const [middle, ...ends] = traffic.feet[k]!;
+    const inSpans = traffic.feet[k]!.inSpan.map((feet) => feet[wall]!);
+    const overWall = traffic.feet[k]!.overWall[wall]![wall]!;
     const base = [
-      one.own.feet[end],
-      one.superimposed.feet[end],
-      ...(tendons ? [tendons.parasitic[k]!.feet[end]] : []),
+      one.own.feet[wall]!,
+      one.superimposed.feet[wall]!,
+      ...(tendons ? [tendons.parasitic[k]!.feet[wall]!] : []),
     ];
-    const rest = times(one.earth.feet[end], earth.restPressure);
-    const least = times(one.earth.feet[end], earth.activePressure);
-    const pressed = one.pressedEarth.feet[end];
-    const behind = one.surcharge[end].feet[end];
-    const warm = (share: number): FootLoad => times(one.longer.feet[end], share * perK * temperature.warmerK);
+    const rest = times(one.earth.feet[wall]!, earth.restPressure);
+    const least = times(one.earth.feet[wall]!, earth.activePressure);
+    const pressed = one.pressedEarth.feet[wall]!;
+    const behind = ends.map((end) => one.surcharge[end]!.feet[wall]!);
+    const warm = (share: number): FootLoad =>
+      times(one.longer.feet[wall]!, share * perK * temperature.warmerK);
     const cold = (share: number): FootLoad =>
-      times(one.longer.feet[end], -share * perK * temperature.colderK + dry);
+      times(one.longer.feet[wall]!, -share * perK * temperature.colderK + dry);
     const beside = service.characteristicTemperature;
-    const inMiddle = middle![end];
-    const overWall = ends[end]![end];
     return [
       [rest],
-      [rest, inMiddle],
+      ...inSpans.map((inMiddle) => [rest, inMiddle]),
       [rest, overWall],
       [least, warm(1)],
-      [least, warm(beside), inMiddle],
+      ...inSpans.map((inMiddle) => [least, warm(beside), inMiddle]),
       [pressed, warm(1)],
       [pressed, warm(beside), overWall],
-      [rest, cold(1), behind],
-      [rest, cold(beside), behind, overWall],
+      ...behind.map((side) => [rest, cold(1), side]),
+      ...behind.map((side) => [rest, cold(beside), side, overWall]),
     ].map((loads) => total([...base, ...loads]));
   });
 }
@@ -56,9 +58,11 @@ const total = (loads: readonly FootLoad[]): FootLoad =>
     momentKNm: a.momentKNm + b.momentKNm,
   }));
 
-/** Movement of the end of the deck from its warmest to its coldest, shrunk, mm. */
-export function endMovementMm({ shape }: FrameModel): number {
+/** Movement of the deck over a wall from its warmest to its coldest, shrunk, mm: it grows from its middle. */
+export function wallMovementMm({ shape }: FrameModel, wall: number): number {
   const { temperature, shrinkage } = portalData;
   const { expansion1PerK, warmerK, colderK } = temperature;
-  return ((expansion1PerK * (warmerK + colderK) + shrinkage.strain) * shape.spanM * 1e3) / 2;
+  const { lengthM, supportsM } = shape;
+  const reachM = Math.abs(2 * supportsM[wall]! - lengthM);
+  return ((expansion1PerK * (warmerK + colderK) + shrinkage.strain) * reachM * 1e3) / 2;
 }

@@ -47,71 +47,75 @@ export function frameLines(model: FrameModel, sized: SizedFrame): MeasuredLine[]
       'forms of the soffit and the edges',
       'soffit between the walls, wings, sides',
     ),
-    ...([0, 1] as const).flatMap((end) => wallLines(model, sized, end)),
+    ...shape.walls.flatMap((_, wall) => wallLines(model, sized, wall)),
     falsework(model),
   );
   return lines;
 }
 
-function wallLines(model: FrameModel, { wallBarsKg }: SizedFrame, end: 0 | 1): MeasuredLine[] {
+function wallLines(model: FrameModel, { wallBarsKg }: SizedFrame, wall: number): MeasuredLine[] {
   const { shape } = model;
-  const name = end === 0 ? 'first wall' : 'last wall';
-  const { upright, level } = wallBarsKg[end];
-  const height = (shape.heightM[end] - shape.kneeM).toFixed(2);
+  const { name: which, heightM, topM, footM } = shape.walls[wall]!;
+  const name = `${which} wall`;
+  const { upright, level } = wallBarsKg[wall]!;
+  const height = (heightM - shape.kneeM).toFixed(2);
+  const [part, item] =
+    which === 'middle'
+      ? (['piers', 'pier-concrete'] as const)
+      : (['abutments', 'abutment-concrete'] as const);
   return [
     measured(
-      'abutments',
-      'abutment-concrete',
-      model.wallM3[end],
+      part,
+      item,
+      model.wallM3[wall]!,
       name,
-      `${mm(shape.legFootM)} mm at the foot, ${mm(shape.legTopM)} mm under the deck, ${height} m high`,
+      `${mm(footM)} mm at the foot, ${mm(topM)} mm under the deck, ${height} m high`,
     ),
+    measured(part, 'reinforcement', upright, `${name} upright`, 'both faces, run into deck and footing'),
     measured(
-      'abutments',
-      'reinforcement',
-      upright,
-      `${name} upright`,
-      'both faces, run into deck and footing',
-    ),
-    measured(
-      'abutments',
+      part,
       'reinforcement',
       level,
       `${name} level`,
       'both faces against early cracks, links, details',
     ),
-  ].map((line) => ({ ...line, support: end }));
+  ].map((line) => ({ ...line, support: wall }));
 }
 
 /** Strand of the deck with its slack, from face to face of the walls, kg. */
 export function strandKg({ shape }: FrameModel, { tendons }: SizedFrame): number {
   if (!tendons) return 0;
   return (
-    tendons.areaM2 * (shape.spanM + shape.legTopM) * boxData.strandSlack.value * materials.steelDensityKgM3
+    tendons.areaM2 * (shape.lengthM + shape.legTopM) * boxData.strandSlack.value * materials.steelDensityKgM3
   );
 }
 
 function formsM2({ shape, task }: FrameModel): number {
-  const { nodes, knees, wingM, wingRootM, spanM, legTopM } = shape;
+  const { nodes, knees, wingM, wingRootM, lengthM, walls, legTopM } = shape;
   let sides = 0;
   for (let i = knees[0] + 1; i < knees[1] - 1; i++) {
     const a = nodes[i]![0];
     const b = nodes[i + 1]![0];
     sides += ((depthAt(shape, a) + depthAt(shape, b)) / 2 - (wingM > 0 ? wingRootM : 0)) * (b - a);
   }
-  return task.deck.widthM * (spanM - legTopM) + 2 * sides;
+  return task.deck.widthM * (lengthM - (walls.length - 1) * legTopM) + 2 * sides;
 }
 
 function falsework({ task, shape }: FrameModel): MeasuredLine {
   const known = task.clearUnderM !== undefined;
-  const { spanM, heightM, kneeM } = shape;
-  const height = (heightM[0] + heightM[1]) / 2 - (kneeM + shape.midspanM) / 2;
+  const { lengthM, walls, kneeM } = shape;
+  const under = task.spansM.map((spanM, span) => {
+    const mean = (walls[span]!.heightM + walls[span + 1]!.heightM) / 2 - (kneeM + shape.midspanM) / 2;
+    return spanM * mean;
+  });
+  const faceM2 = under.reduce((sum, m2) => sum + m2, 0);
+  const height = faceM2 / lengthM;
   const { widthM } = task.deck;
   return measured(
     'temporary-works',
     'falsework',
-    spanM * height * widthM,
+    faceM2 * widthM,
     'falsework under the deck',
-    `${height.toFixed(1)} m high${known ? '' : ' (assumed)'}, ${widthM} m wide, ${spanM.toFixed(1)} m long`,
+    `${height.toFixed(1)} m high${known ? '' : ' (assumed)'}, ${widthM} m wide, ${lengthM.toFixed(1)} m long`,
   );
 }

@@ -13,10 +13,10 @@ export interface ChainEffects {
   readonly thrustKN: Float64Array;
   /** In the members. */
   readonly shearKN: Float64Array;
-  /** On the footings: downwards, towards the span, moment that turns it towards the span. */
-  readonly feet: readonly [FootLoad, FootLoad];
-  /** Downwards at the middle of the span, m. */
-  readonly middleM: number;
+  /** On the footings: downwards, towards the span, moment that turns it towards the span; of a middle wall towards the last. */
+  readonly feet: readonly FootLoad[];
+  /** Downwards at the middle of each span, m. */
+  readonly middlesM: readonly number[];
 }
 
 export interface FootLoad {
@@ -57,15 +57,15 @@ export interface FrameModel {
   readonly concrete: Concrete;
   readonly prestressed: boolean;
   readonly shape: FrameShape;
-  /** Members between nodes: length, m. */
+  /** Members: their nodes and length, m. Those of the chain start at the node of their number. */
+  readonly members: readonly (readonly [number, number])[];
   readonly memberM: Float64Array;
   /** Nodes of the deck, axis to axis, and their x, m. */
   readonly deckNodes: readonly number[];
   readonly deckXM: Float64Array;
-  /** Nodes at which sections are designed: feet to soffits, faces of the walls to each other. */
-  readonly designNodes: readonly number[];
   readonly deckM3: number;
-  readonly wallM3: readonly [number, number];
+  /** Of each wall. */
+  readonly wallM3: readonly number[];
   readonly cases: readonly FrameOnFeet[];
 }
 
@@ -74,11 +74,16 @@ export function frameModel(task: UnitTask): FrameModel {
   const { standard: standardId, deck, spansM } = task;
   const standard = loadStandard(standardId);
   const shape = frameShape(task);
-  const { nodes, sections, knees } = shape;
-  const prestressed = spansM[0]! > portalData.reinforced.mostSpanM;
+  const { nodes, sections, knees, walls, middles, chainNodes } = shape;
+  const prestressed = Math.max(...spansM) > portalData.reinforced.mostSpanM;
   const strength = materials.concreteDefaultMPa[standardId][prestressed ? 'box' : 'slab'];
   const grade = concrete(standardId, strength);
-  const members = nodes.slice(1).map((_, i) => [i, i + 1] as const);
+  const middle = walls.find(({ name }) => name === 'middle');
+  const members = nodes.slice(1).map((_, e): readonly [number, number] => {
+    if (e < chainNodes - 1) return [e, e + 1];
+    return [e + 1, e + 2 < nodes.length ? e + 2 : middle!.knee];
+  });
+  const inMiddleBlock = (i: number, j: number): boolean => i >= chainNodes && j < chainNodes;
   const memberM = Float64Array.from(members, ([i, j]) =>
     Math.hypot(nodes[j]![0] - nodes[i]![0], nodes[j]![1] - nodes[i]![1]),
   );
@@ -86,7 +91,11 @@ export function frameModel(task: UnitTask): FrameModel {
   // The piece of a wall inside the depth of the deck goes on as the wall.
   const mean = (pick: (node: number) => number): Float64Array =>
     Float64Array.from(members, ([i, j]) =>
-      i === knees[0] - 1 ? pick(i) : j === knees[1] + 1 ? pick(j) : (pick(i) + pick(j)) / 2,
+      i === knees[0] - 1 || inMiddleBlock(i, j)
+        ? pick(i)
+        : j === knees[1] + 1
+          ? pick(j)
+          : (pick(i) + pick(j)) / 2,
     );
   const area = mean((i) => sections[i]!.areaM2);
   const inertia = mean((i) => sections[i]!.inertiaM4);
@@ -99,6 +108,8 @@ export function frameModel(task: UnitTask): FrameModel {
   const levelM = Float64Array.from(members, ([i, j]) => Math.abs(nodes[j]![0] - nodes[i]![0]));
   const ownKN = Float64Array.from(members, ([i, j], e) => {
     if (inDeck[e]) return gamma * area[e]! * levelM[e]!;
+    // The deck goes through over a wall in the middle.
+    if (inMiddleBlock(i, j)) return 0;
     const knee = i === knees[0] - 1 ? j : j === knees[1] + 1 ? i : -1;
     // Of the block over a wall its outer half: the inner is the end of the deck.
     return gamma * (knee < 0 ? area[e]! * memberM[e]! : sections[knee]!.areaM2 * (shape.legTopM / 2));
@@ -112,19 +123,18 @@ export function frameModel(task: UnitTask): FrameModel {
       members,
       eaKN: area.map((a) => eKNm2 * a),
       eiKNm2: inertia.map((i) => eKNm2 * i),
-      feet: ([0, 1] as const).map((end) => {
-        const lengthM = Math.max(leastLengthM, lengthOverHeight * shape.heightM[end]);
+      feet: walls.map(({ heightM, foot }) => {
+        const lengthM = Math.max(leastLengthM, lengthOverHeight * heightM);
         const soil = feet === 'stiff' ? stiffKNm3 : softKNm3;
         return {
-          node: end === 0 ? 0 : n - 1,
+          node: foot,
           alongKNPerM: soil * lengthM * widthM,
           upKNPerM: Infinity,
           turnKNm: feet === 'stiff' ? (soil * widthM * lengthM ** 3) / 12 : 0,
         };
       }),
     });
-    const middle = (knees[0] + knees[1]) >> 1;
-    const run = (load: FrameLoad): ChainEffects => chain(frameEffects(frame, load), beside, middle);
+    const run = (load: FrameLoad): ChainEffects => chain(frameEffects(frame, load), beside, shape);
     const down = (forces: Iterable<readonly [node: number, kN: number]>): ChainEffects => {
       const nodal = new Float64Array(3 * n);
       for (const [node, kN] of forces) nodal[3 * node + 1]! -= kN;
@@ -133,8 +143,7 @@ export function frameModel(task: UnitTask): FrameModel {
     const pushed = (ends: readonly (0 | 1)[], kPa: (depthM: number, heightM: number) => number) => {
       const nodal = new Float64Array(3 * n);
       for (const end of ends) {
-        const wall = wallNodes(shape, end);
-        const height = shape.heightM[end];
+        const { nodes: wall, heightM: height } = end === 0 ? walls[0]! : walls[walls.length - 1]!;
         const forces = pressureOnNodes(
           wall.map((i) => -nodes[i]![1]),
           widthM,
@@ -151,19 +160,19 @@ export function frameModel(task: UnitTask): FrameModel {
     };
     const { earth, temperature } = portalData;
     const rangeM =
-      (temperature.expansion1PerK * (temperature.warmerK + temperature.colderK) * shape.spanM) / 2;
+      (temperature.expansion1PerK * (temperature.warmerK + temperature.colderK) * shape.lengthM) / 2;
     const pressure = ratchetPressure(
-      Math.min(...shape.heightM),
+      Math.min(walls[0]!.heightM, walls[walls.length - 1]!.heightM),
       rangeM,
       feet === 'stiff' ? earth.stiffFactor : earth.softFactor,
     );
     const surchargeKPa = earth.restPressure * earth.surchargeKPa;
     const braked = new Float64Array(3 * n);
-    braked[3 * middle] = 1;
+    braked[3 * middles[0]!] = 1;
     return {
       feet,
-      own: down(halves(ownKN)),
-      superimposed: down(halves(superimposedKN)),
+      own: down(halves(ownKN, members)),
+      superimposed: down(halves(superimposedKN, members)),
       earth: pushed([0, 1], (depth) => earth.fillKNm3 * depth),
       pressedEarth: pushed([0, 1], (depth, height) =>
         pressureAt(depth, height, { upper: pressure, foot: earth.restPressure }),
@@ -182,7 +191,7 @@ export function frameModel(task: UnitTask): FrameModel {
       run,
     };
   };
-  // Of a deck node the members on both sides, of a wall node the one over it.
+  // Of a deck node the members on both sides, of a wall node the one over it; behind the chain members start a node later.
   const beside = Array.from({ length: n }, (_, i): readonly [number, number] =>
     i > knees[0] && i < knees[1] ? [i - 1, i] : i < knees[1] ? [i, i] : [i - 1, i - 1],
   );
@@ -193,21 +202,19 @@ export function frameModel(task: UnitTask): FrameModel {
     concrete: grade,
     prestressed,
     shape,
+    members,
     memberM,
     deckNodes,
     deckXM: Float64Array.from(deckNodes, (i) => nodes[i]![0]),
-    designNodes: [...wallNodes(shape, 0), ...range(knees[0] + 1, knees[1] - 1), ...wallNodes(shape, 1)],
     deckM3: deckVolume(shape),
-    wallM3: [0, 1].map(
-      (end) => ((shape.legTopM + shape.legFootM) / 2) * (shape.heightM[end]! - shape.kneeM) * widthM,
-    ) as [number, number],
+    wallM3: walls.map(({ topM, footM, heightM }) => ((topM + footM) / 2) * (heightM - shape.kneeM) * widthM),
     cases: [caseOf('stiff'), caseOf('soft')],
   };
 }
 
-/** Nodes of a wall from its foot or soffit on, in the order of the chain. */
-export function wallNodes({ knees, nodes }: FrameShape, end: 0 | 1): number[] {
-  return end === 0 ? range(0, knees[0] - 1) : range(knees[1] + 1, nodes.length - 1);
+/** Nodes at which the deck is designed: from face to face of the walls. */
+export function deckDesignNodes({ knees, walls }: FrameShape): number[] {
+  return range(knees[0] + 1, knees[1] - 1).filter((node) => walls.every(({ knee }) => knee !== node));
 }
 
 const range = (from: number, to: number): number[] =>
@@ -222,36 +229,41 @@ function deckVolume({ nodes, sections, knees, legTopM }: FrameShape): number {
 }
 
 /** Half of what each member weighs on either of its nodes, kN. */
-function* halves(weightKN: Float64Array): Iterable<readonly [node: number, kN: number]> {
+function* halves(
+  weightKN: Float64Array,
+  members: FrameModel['members'],
+): Iterable<readonly [node: number, kN: number]> {
   for (const [e, weight] of weightKN.entries()) {
-    yield [e, weight / 2];
-    yield [e + 1, weight / 2];
+    yield [members[e]![0], weight / 2];
+    yield [members[e]![1], weight / 2];
   }
 }
 
 function chain(
   effects: FrameEffects,
   beside: readonly (readonly [number, number])[],
-  middle: number,
+  { chainNodes, walls, middles }: FrameShape,
 ): ChainEffects {
   const { startKNm, endKNm, normalKN, shearKN, moved, feet } = effects;
   const n = beside.length;
   const momentKNm = new Float64Array(n);
   const thrustKN = new Float64Array(n);
   for (let i = 0; i < n; i++) {
-    momentKNm[i] = i < n - 1 ? startKNm[i]! : endKNm[i - 1]!;
+    momentKNm[i] =
+      i < chainNodes - 1 ? startKNm[i]! : i === chainNodes - 1 ? endKNm[i - 1]! : startKNm[i - 1]!;
     const [a, b] = beside[i]!;
     thrustKN[i] = -(normalKN[a]! + normalKN[b]!) / 2;
   }
-  const [first, last] = feet;
   return {
     momentKNm,
     thrustKN,
     shearKN,
-    feet: [
-      { verticalKN: first![1], alongKN: -first![0], momentKNm: first![2] },
-      { verticalKN: last![1], alongKN: last![0], momentKNm: -last![2] },
-    ],
-    middleM: -moved[3 * middle + 1]!,
+    feet: walls.map(({ name }, w) => {
+      const [alongKN, verticalKN, momentKNm] = feet[w]!;
+      return name === 'last'
+        ? { verticalKN, alongKN, momentKNm: -momentKNm }
+        : { verticalKN, alongKN: -alongKN, momentKNm };
+    }),
+    middlesM: middles.map((node) => -moved[3 * node + 1]!),
   };
 }

@@ -24,28 +24,31 @@ export function frameShear(
   tendons: FrameTendons | null,
   faces: readonly FaceBars[],
 ): { readonly deck: PartShear; readonly walls: PartShear } {
-  const { shape, memberM } = model;
-  const { nodes, sections, knees, spanM, legTopM } = shape;
+  const { shape, members, memberM } = model;
+  const { nodes, sections, knees, walls, legTopM } = shape;
   const all = combinations(model, traffic, 'ultimate', tendons?.parasitic ?? null);
   const { prestress } = model.standard.factors.uls;
   const bars = leastBars(model, faces);
   const parts = { deck: none(), walls: none() };
   for (let e = 0; e < memberM.length; e++) {
-    if (e === knees[0] - 1 || e === knees[0] || e === knees[1] - 1 || e === knees[1]) continue;
+    const [start, end] = members[e]!;
+    // Where deck and walls go through each other.
+    if (walls.some(({ knee }) => start === knee || end === knee)) continue;
     const inDeck = e > knees[0] && e < knees[1];
     const part = inDeck ? parts.deck : parts.walls;
-    const section = sections[e]!;
-    const next = sections[e + 1]!;
+    const section = sections[start]!;
+    const next = sections[end]!;
     const widthM = Math.min(section.innerWidthM, section.outerWidthM);
     const depthM = (section.depthM + next.depthM) / 2;
     const effectiveM = depthM - slabDeckData.bars.coverM - 0.02;
-    const x = (nodes[e]![0] + nodes[e + 1]![0]) / 2;
-    const near = inDeck && Math.min(x, spanM - x) - legTopM / 2 < effectiveM;
+    const x = (nodes[start]![0] + nodes[end]![0]) / 2;
+    const off = Math.min(...walls.map(({ xM }) => Math.abs(x - xM)));
+    const near = inDeck && off - legTopM / 2 < effectiveM;
     const level = (node: number): number => (tendons ? tendons.levelM[node]! - sections[node]!.outerM : 0);
     const steady =
-      inDeck && tendons ? (-prestress * tendons.forceKN * (level(e + 1) - level(e))) / memberM[e]! : 0;
+      inDeck && tendons ? (-prestress * tendons.forceKN * (level(end) - level(start))) / memberM[e]! : 0;
     const demandKN = Math.max(...all.map((one) => worstShear(one, e, steady)));
-    const steelM2 = (bars[e]! + bars[e + 1]!) / 2 + (inDeck && tendons ? tendons.areaM2 : 0);
+    const steelM2 = (bars[start]! + bars[end]!) / 2 + (inDeck && tendons ? tendons.areaM2 : 0);
     const alone =
       1e3 *
       widthM *

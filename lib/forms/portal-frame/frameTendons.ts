@@ -3,7 +3,8 @@ import { boxData } from '../concrete-box/boxData.ts';
 import { tendonStress, type TendonStress } from '../concrete-box/tendonForce.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
 import { combinations, worstMoment } from './combine.ts';
-import type { ChainEffects, FrameModel } from './frameModel.ts';
+import { deckDesignNodes, type ChainEffects, type FootLoad, type FrameModel } from './frameModel.ts';
+import { spanAt } from './frameShape.ts';
 import type { FrameTraffic } from './frameTraffic.ts';
 import { portalData } from './portalData.ts';
 
@@ -28,11 +29,28 @@ export interface FrameTendons {
   readonly freshTension: { readonly stressMPa: number; readonly limitMPa: number };
 }
 
+/** Shares of the greatest drape that are tried where tendons run over a wall in the middle. */
+const drapes = [1, 0.85, 0.7, 0.55, 0.4, 0.25, 0.1] as const;
+
 /**
- * Fewest strands with which the deck stays compressed (EN, frequent) or within its tension (AASHTO, Service III).
+ * Fewest strands with which the deck stays compressed (EN, frequent) or within its tension (AASHTO, Service III). In one
+ * span they hang as low as they can; over a wall in the middle a drape that serves the spans bends the deck there, so that
+ * of several drapes the one with the fewest strands is taken that stays within its stresses on the day of stressing too.
  * @param atLeast strands that something else asks for
  */
 export function frameTendons(model: FrameModel, traffic: FrameTraffic, atLeast = 0): FrameTendons {
+  if (model.task.spansM.length === 1) return tendonsAt(model, traffic, atLeast, 1);
+  const overStressed = ({ compression, freshTension }: FrameTendons): number =>
+    Math.max(1, compression.stressMPa / compression.limitMPa, freshTension.stressMPa / freshTension.limitMPa);
+  return drapes
+    .map((drape) => tendonsAt(model, traffic, atLeast, drape))
+    .reduce((a, b) => {
+      const [over, other] = [overStressed(a), overStressed(b)];
+      return other < over || (other === over && b.strands < a.strands) ? b : a;
+    });
+}
+
+function tendonsAt(model: FrameModel, traffic: FrameTraffic, atLeast: number, drape: number): FrameTendons {
   const { shape, standardId, task } = model;
   const { sections } = shape;
   const strandM2 = boxData.strandAreaMm2[standardId] * 1e-6;
@@ -42,7 +60,7 @@ export function frameTendons(model: FrameModel, traffic: FrameTraffic, atLeast =
   const mostCount = Math.max(2, Math.floor(soffitM / slabDeckData.tendons.closestM));
   const largest = sizes[sizes.length - 1]!;
   const mostStrands = mostCount * largest.strands;
-  const levelM = tendonLevels(model);
+  const levelM = tendonLevels(model, drape);
   const arm = (node: number): number => levelM[node]! - sections[node]!.outerM;
   const unit = model.cases.map(({ run }) => run(restrained(model, arm)));
   const frequent = combinations(model, traffic, 'frequent', null);
@@ -54,7 +72,7 @@ export function frameTendons(model: FrameModel, traffic: FrameTraffic, atLeast =
 
   const needFor = (ductM: number): number => {
     let most = 0;
-    for (const node of designed(model))
+    for (const node of deckDesignNodes(model.shape))
       frequent.forEach((combination, k) => {
         const { areaM2, inertiaM4, outerM, depthM } = sections[node]!;
         const e = arm(node);
@@ -77,12 +95,14 @@ export function frameTendons(model: FrameModel, traffic: FrameTraffic, atLeast =
   for (let pass = 1; ; pass++) {
     const { ductM } = sizeFor(strands);
     const jackMPa = boxData.jacking[standardId] * materials.strand[standardId].ultimateMPa;
-    const axialMPa =
-      (strands * strandM2 * jackMPa) / sections[(shape.knees[0] + shape.knees[1]) >> 1]!.areaM2;
-    // From hogging to sagging within half the span the tendon turns twice as much as one that only sags.
-    const sagM = 2 * (shape.midspanM - portalData.tendons.lowFromSoffitM - portalData.tendons.kneeTopM);
+    const axialMPa = (strands * strandM2 * jackMPa) / sections[shape.middles[0]!]!.areaM2;
+    // From hogging to sagging within half the span the tendon turns twice as much as one that only sags; of more spans the
+    // losses count that already.
+    const turns = task.spansM.length === 1 ? 2 : 1;
+    const sagM =
+      turns * drape * (shape.midspanM - portalData.tendons.lowFromSoffitM - portalData.tendons.kneeTopM);
     const stress = tendonStress(
-      { standardId, task, lengthM: shape.spanM, concrete: model.concrete },
+      { standardId, task, lengthM: shape.lengthM, concrete: model.concrete },
       Math.max(0.05, sagM),
       Math.min(axialMPa, model.concrete.fckMPa / 2),
     );
@@ -114,18 +134,17 @@ export function frameTendons(model: FrameModel, traffic: FrameTraffic, atLeast =
   }
 }
 
-/** Nodes at which the deck is checked: from face to face of the walls. */
-const designed = ({ shape: { knees } }: FrameModel): number[] =>
-  Array.from({ length: knees[1] - knees[0] - 1 }, (_, i) => knees[0] + 1 + i);
-
 /** Axis of the tendons below the top: high at the walls, low at midspan, two parabolas that meet at the inflection. */
-function tendonLevels({ shape }: FrameModel): Float64Array {
-  const { nodes, knees, spanM, midspanM } = shape;
+function tendonLevels({ shape }: FrameModel, drape: number): Float64Array {
+  const { nodes, knees, supportsM, midspanM } = shape;
   const { kneeTopM, lowFromSoffitM, inflection } = portalData.tendons;
-  const drop = Math.max(0.01, midspanM - lowFromSoffitM - kneeTopM);
+  const drop = drape * Math.max(0.01, midspanM - lowFromSoffitM - kneeTopM);
   const levels = new Float64Array(nodes.length);
   for (let i = knees[0]; i <= knees[1]; i++) {
-    const u = Math.min(1, (2 * Math.min(nodes[i]![0], spanM - nodes[i]![0])) / spanM);
+    const x = nodes[i]![0];
+    const span = spanAt(supportsM, x);
+    const [from, to] = [supportsM[span]!, supportsM[span + 1]!];
+    const u = Math.min(1, (2 * Math.min(x - from, to - x)) / (to - from));
     levels[i] =
       kneeTopM + drop * (u < inflection ? u ** 2 / inflection : 1 - (1 - u) ** 2 / (1 - inflection));
   }
@@ -150,7 +169,7 @@ function restrained(
 }
 
 function scaled(effects: ChainEffects, factor: number): ChainEffects {
-  const foot = ({ verticalKN, alongKN, momentKNm }: ChainEffects['feet'][0]): ChainEffects['feet'][0] => ({
+  const foot = ({ verticalKN, alongKN, momentKNm }: FootLoad): FootLoad => ({
     verticalKN: factor * verticalKN,
     alongKN: factor * alongKN,
     momentKNm: factor * momentKNm,
@@ -160,8 +179,8 @@ function scaled(effects: ChainEffects, factor: number): ChainEffects {
     momentKNm: times(effects.momentKNm),
     thrustKN: times(effects.thrustKN),
     shearKN: times(effects.shearKN),
-    feet: [foot(effects.feet[0]), foot(effects.feet[1])],
-    middleM: factor * effects.middleM,
+    feet: effects.feet.map(foot),
+    middlesM: effects.middlesM.map((value) => factor * value),
   };
 }
 
@@ -183,7 +202,7 @@ function stressesOf(
     if (stressMPa / limitMPa > compression.stressMPa / compression.limitMPa)
       compression = { stressMPa, limitMPa };
   };
-  for (const node of designed(model)) {
+  for (const node of deckDesignNodes(model.shape)) {
     const { areaM2, inertiaM4, outerM, depthM } = model.shape.sections[node]!;
     model.cases.forEach((one, k) => {
       const axial = (1 + unit[k]!.thrustKN[node]!) / areaM2;

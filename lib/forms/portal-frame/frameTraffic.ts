@@ -12,16 +12,22 @@ export interface TrafficRange {
   readonly shearMinKN: Float64Array;
 }
 
+/** Loads of all lanes on the feet: one span full with the vehicles in its middle, all full with the vehicles over a wall. */
+export interface LanesOnFeet {
+  readonly inSpan: readonly (readonly FootLoad[])[];
+  readonly overWall: readonly (readonly FootLoad[])[];
+}
+
 /** Traffic on a frame. Moments and shears are those of its heaviest metre times the width of the deck. */
 export interface FrameTraffic {
   readonly strips: WheelStrips;
   readonly load: TrafficLoad;
   /** One for each kind of feet: vehicles and uniform load apart, so that combinations may take shares of them. */
   readonly cases: readonly { readonly vehicle: TrafficRange; readonly uniform: TrafficRange }[];
-  /** Of all lanes, on stiff and on soft feet, at the middle of the span, whole stiffness, m. */
-  readonly deflectionM: number;
-  /** What all lanes put on the feet: full over the span with the vehicles in its middle, and at either end. */
-  readonly feet: readonly (readonly (readonly [FootLoad, FootLoad])[])[];
+  /** Of all lanes, on stiff or on soft feet, at the middle of each span, whole stiffness, m. */
+  readonly deflectionsM: readonly number[];
+  /** What all lanes put on the feet, on stiff and on soft ones. */
+  readonly feet: readonly LanesOnFeet[];
 }
 
 /** Places the traffic of the standard on the influence lines of the frame. */
@@ -47,7 +53,7 @@ export function frameTraffic(model: FrameModel): FrameTraffic {
       vehicle: rangeOf(one, track, vehicle, bending, shearing),
       uniform: rangeOf(one, track, uniform, uniformKNm, uniformKNm),
     })),
-    deflectionM: deflection(model, track, load),
+    deflectionsM: shape.middles.map((_, span) => deflection(model, track, load, span)),
     feet: model.cases.map((one) => onFeet(model, one, load)),
   };
 }
@@ -91,10 +97,10 @@ function rangeOf(
 const sameAll = (unit: FrameOnFeet['unit'], e: number): boolean =>
   unit.every(({ shearKN }) => Math.abs(shearKN[e]! - shearKN[e - 1]!) < 1e-9);
 
-function deflection({ cases, standard }: FrameModel, track: Track, load: TrafficLoad): number {
+function deflection({ cases, standard }: FrameModel, track: Track, load: TrafficLoad, span: number): number {
   return Math.max(
     ...cases.flatMap(({ unit }) => {
-      const line = Float64Array.from(unit, ({ middleM }) => middleM);
+      const line = Float64Array.from(unit, ({ middlesM }) => middlesM[span]!);
       return standard.deflection.combinations.map(
         ({ vehicle, uniform }) =>
           trafficOnInfluence(
@@ -112,36 +118,36 @@ function deflection({ cases, standard }: FrameModel, track: Track, load: Traffic
   );
 }
 
-/** Loads on the feet with the deck full and the vehicles in the middle or over a wall. */
+/** Loads on the feet with one span full and the vehicles in its middle, or the whole deck full and they over a wall. */
 function onFeet(
-  { standard, deckXM }: FrameModel,
+  { standard, deckXM, deckNodes, shape }: FrameModel,
   { unit }: FrameOnFeet,
   load: TrafficLoad,
-): (readonly [FootLoad, FootLoad])[] {
+): LanesOnFeet {
   const heaviest = Math.max(
     ...standard.vehicles.map(({ axles }) => axles.reduce((sum, { loadKN }) => sum + loadKN, 0)),
   );
   const vehiclesKN = load.vehicleFactor * heaviest * (1 + standard.dynamicAllowance);
   const evenKNm = load.udlKNm + load.footwayKNm;
-  const last = unit.length - 1;
-  const full = Float64Array.from(unit, (_, k) => {
-    const left = k > 0 ? deckXM[k]! - deckXM[k - 1]! : 0;
-    const right = k < last ? deckXM[k + 1]! - deckXM[k]! : 0;
-    return (evenKNm * (left + right)) / 2;
-  });
-  return [last >> 1, 0, last].map((at) => {
-    const sum = (end: 0 | 1): FootLoad => {
+  const knees = shape.walls.map(({ knee }) => knee - deckNodes[0]!);
+  const sum = (at: number, from: number, to: number): FootLoad[] =>
+    shape.walls.map((_, wall) => {
       let verticalKN = 0;
       let alongKN = 0;
       let momentKNm = 0;
-      unit.forEach(({ feet }, k) => {
-        const kN = full[k]! + (k === at ? vehiclesKN : 0);
-        verticalKN += kN * feet[end].verticalKN;
-        alongKN += kN * feet[end].alongKN;
-        momentKNm += kN * feet[end].momentKNm;
-      });
+      for (let k = from; k <= to; k++) {
+        const left = k > from ? deckXM[k]! - deckXM[k - 1]! : 0;
+        const right = k < to ? deckXM[k + 1]! - deckXM[k]! : 0;
+        const kN = (evenKNm * (left + right)) / 2 + (k === at ? vehiclesKN : 0);
+        const foot = unit[k]!.feet[wall]!;
+        verticalKN += kN * foot.verticalKN;
+        alongKN += kN * foot.alongKN;
+        momentKNm += kN * foot.momentKNm;
+      }
       return { verticalKN, alongKN, momentKNm };
-    };
-    return [sum(0), sum(1)] as const;
-  });
+    });
+  return {
+    inSpan: shape.middles.map((node, span) => sum(node - deckNodes[0]!, knees[span]!, knees[span + 1]!)),
+    overWall: knees.map((knee) => sum(knee, 0, unit.length - 1)),
+  };
 }

@@ -12,7 +12,7 @@ import { portalData } from './portalData.ts';
 import { sizeFrame } from './sizeFrame.ts';
 
 /**
- * Concrete portal frame of one span: haunched deck and walls in one, without bearings or joints, cast on falsework;
+ * Concrete portal frame of one span, or of two with a wall between them: haunched deck and walls in one, without bearings or joints, cast on falsework;
  * reinforced on short spans, its deck prestressed beyond. `depthM` of the task is the deck at midspan. Worked out on stiff
  * and on soft feet, with the fill pressing on the walls. Spans of about 6 to 60 m.
  */
@@ -20,17 +20,17 @@ export const portalFrame: FormModule = {
   id: 'portal-frame',
   family: 'girder',
   name: 'Portal frame',
-  pattern: { kind: 'continuous', mostSpans: 1 },
+  pattern: { kind: 'continuous', mostSpans: 2 },
   methods: ['falsework'],
   size,
 };
 
-/** @throws RangeError for more than one span, or depths or widths that are not possible */
+/** @throws RangeError for more than two spans, or depths or widths that are not possible */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
-  if (task.spansM.length !== 1)
+  if (task.spansM.length > 2)
     throw new RangeError(
-      `spansM: expected one span, received ${task.spansM.length}; a portal frame stands on its two walls`,
+      `spansM: expected one span or two, received ${task.spansM.length}; a portal frame stands on its walls`,
     );
   const model = frameModel(task);
   const sized = sizeFrame(model);

@@ -2,7 +2,7 @@ import { barMassKg } from '../slab/barsAcross.ts';
 import { barDesignMPa } from '../common/bars.ts';
 import { slabData } from '../common/slab/slabData.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
-import { frameBars, type FaceBars } from './frameBars.ts';
+import { frameBars, wallFaces, type FaceBars } from './frameBars.ts';
 import type { FrameModel } from './frameModel.ts';
 import { frameShear, type PartShear } from './frameShear.ts';
 import { frameTendons, type FrameTendons } from './frameTendons.ts';
@@ -24,10 +24,7 @@ export interface SizedFrame {
     readonly details: number;
   };
   /** Bars of each wall: upright, level, links and details together. */
-  readonly wallBarsKg: readonly [
-    { readonly upright: number; readonly level: number },
-    { readonly upright: number; readonly level: number },
-  ];
+  readonly wallBarsKg: readonly { readonly upright: number; readonly level: number }[];
 }
 
 const moreStrands = 1.08;
@@ -47,7 +44,7 @@ export function sizeFrame(model: FrameModel): SizedFrame {
   const shear = frameShear(model, traffic, tendons, faces);
   const across = barsAcross(model, traffic, faces[0]!, tendons);
   const { shape, task } = model;
-  const lengthM = shape.spanM + shape.legTopM;
+  const lengthM = shape.lengthM + shape.legTopM;
   const volume = (id: FaceBars['id']): number => faces.find((face) => face.id === id)!.volumeM3;
   const detailsKgM3 = slabDeckData.surfaceBarsKgM3.value;
   const soffitM = task.deck.widthM - 2 * shape.wingM;
@@ -56,15 +53,15 @@ export function sizeFrame(model: FrameModel): SizedFrame {
       across.highM2PerM * task.deck.widthM +
       2 * 2.5 * shape.wingM * Math.max(0, shape.wingBarsM2PerM - across.highM2PerM)) *
     lengthM;
-  const wall = (end: 0 | 1) => {
-    const name = end === 0 ? 'first' : 'last';
+  const wallBarsKg = shape.walls.map(({ name }, w) => {
+    const [outer, inner] = wallFaces(name);
+    const links = shear.walls.linksM3 / shape.walls.length;
     return {
-      upright: barMassKg(volume(`${name}-outer`) + volume(`${name}-inner`)),
+      upright: barMassKg(volume(outer) + volume(inner)),
       level:
-        barMassKg(portalData.wallAcross.ratio * model.wallM3[end] + shear.walls.linksM3 / 2) +
-        detailsKgM3 * model.wallM3[end],
+        barMassKg(portalData.wallAcross.ratio * model.wallM3[w]! + links) + detailsKgM3 * model.wallM3[w]!,
     };
-  };
+  });
   return {
     traffic,
     tendons,
@@ -78,7 +75,7 @@ export function sizeFrame(model: FrameModel): SizedFrame {
       links: barMassKg(shear.deck.linksM3),
       details: detailsKgM3 * model.deckM3,
     },
-    wallBarsKg: [wall(0), wall(1)],
+    wallBarsKg,
   };
 }
 

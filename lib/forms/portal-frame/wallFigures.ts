@@ -1,10 +1,15 @@
 import { described, type At, type Descriptor } from '../../model/index.ts';
 import { linesOf, spansOf } from '../common/formManual.ts';
 
-const ends = ['first', 'last'] as const;
+/** Name of a wall: of two or of three. */
+const nameOf = (at: At): string => {
+  const wall = at.index('wall');
+  return wall === 0 ? 'first' : wall === at.design.task.spansM.length ? 'last' : 'middle';
+};
+const isMiddle = (at: At): boolean => nameOf(at) === 'middle';
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 const wallPath = (what: string): string => `options/:option/designs/:unit/walls/:wall/${what}`;
-const wallWord = (at: At): string => (at.index('wall') === 0 ? 'first wall' : 'last wall');
+const wallWord = (at: At): string => `${nameOf(at)} wall`;
 
 /** What a wall in one with the deck hands to its foundation and to the bill. */
 export const wallFigures: readonly Descriptor[] = [
@@ -13,8 +18,8 @@ export const wallFigures: readonly Descriptor[] = [
     label: (at) => `thickness at the foot, ${wallWord(at)}`,
     unit: 'm',
     method: 'as sized',
-    formula: 'thickness of the walls at their foot',
-    inputs: (at) => ({ foot: `${at.unit}/figures/wallFootM` }),
+    formula: 'thickness of the walls at their foot; of one between two spans as on top',
+    inputs: (at) => ({ foot: `${at.unit}/figures/${isMiddle(at) ? 'wallTopM' : 'wallFootM'}` }),
     compute: ({ foot }) => foot,
   }),
   described({
@@ -23,8 +28,18 @@ export const wallFigures: readonly Descriptor[] = [
     unit: 'm',
     method: 'as sized',
     formula: 'height of the frame at this end',
-    inputs: (at) => ({ height: `${at.unit}/figures/${ends[at.index('wall')]!}HeightM` }),
+    inputs: (at) => ({ height: `${at.unit}/figures/${nameOf(at)}HeightM` }),
     compute: ({ height }) => height,
+  }),
+  described({
+    path: wallPath('movementMm'),
+    when: isMiddle,
+    label: 'movement of the deck at the middle wall',
+    unit: 'mm',
+    method: 'product',
+    formula: 'movement of each end x difference of the spans / length: the deck grows from its middle',
+    inputs: (at) => ({ movement: `${at.unit}/figures/movementMm`, spans: spansOf(at) }),
+    compute: ({ movement, spans }) => (movement * Math.abs(spans[0]! - spans[1]!)) / sum(spans),
   }),
   described({
     path: wallPath('movementMm'),
@@ -68,7 +83,7 @@ export const wallFigures: readonly Descriptor[] = [
       inputs: (at) => ({
         spans: spansOf(at),
         deck: `${at.unit}/task/depthM`,
-        height: `${at.unit}/figures/${ends[at.index('wall')]!}HeightM`,
+        height: `${at.unit}/figures/${nameOf(at)}HeightM`,
         superimposed: `${at.unit}/task/deck/superimposedKNm`,
         pressed: [`${at.unit}/figures/pressedEarth`, `${at.unit}/figures/pressedEarthSoft`],
         rest: 'data/portal-frame/earth/restPressure',

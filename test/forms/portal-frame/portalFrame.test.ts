@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { quantityOf } from '../../../lib/forms/common/measured.ts';
 import { pressureAt, pressureOnNodes, ratchetPressure } from '../../../lib/forms/portal-frame/earth.ts';
-import { frameModel, wallNodes } from '../../../lib/forms/portal-frame/frameModel.ts';
+import { frameModel } from '../../../lib/forms/portal-frame/frameModel.ts';
 import { frameShape } from '../../../lib/forms/portal-frame/frameShape.ts';
 import { portalFrame } from '../../../lib/forms/portal-frame/index.ts';
 import type { UnitTask } from '../../../lib/model/index.ts';
@@ -34,7 +34,7 @@ const useOf = (design: ReturnType<typeof portalFrame.size>, id: string): number 
 
 describe('portalFrame.size()', () => {
   it.each([
-    [{ spansM: [20, 20] }, /one span/u],
+    [{ spansM: [20, 20, 20], clearUnderM: [5, 5, 5, 5] }, /one span or two/u],
     [{ depthM: NaN }, /depthM/u],
     [{ deck: { ...deck, carriagewayM: 13 } }, /carriagewayM/u],
   ])('size(%o) says what is wrong', (change, message) => {
@@ -78,15 +78,15 @@ describe('portalFrame.size()', () => {
   it('balances thrust: what one foot pushes, the other and the fill push back', () => {
     const { cases } = frameModel(task(20, 0.7));
     for (const one of cases) {
-      const [first, last] = one.own.feet;
+      const [first, last] = [one.own.feet[0]!, one.own.feet[1]!];
       expect(first.alongKN).toBeCloseTo(last.alongKN, 6);
       expect(first.alongKN).toBeLessThan(0);
       // Surcharge behind the first wall alone: 0.43 x 10 kPa on the height and the width of the wall.
-      const [a, b] = one.surcharge[0].feet;
-      const height = frameShape(task(20, 0.7)).heightM[0];
+      const [a, b] = [one.surcharge[0].feet[0]!, one.surcharge[0].feet[1]!];
+      const height = frameShape(task(20, 0.7)).walls[0]!.heightM;
       expect(a.alongKN - b.alongKN).toBeCloseTo(0.43 * 10 * height * 12, 6);
       // Braking goes into both feet.
-      const [c, d] = one.braking.feet;
+      const [c, d] = [one.braking.feet[0]!, one.braking.feet[1]!];
       expect(c.alongKN - d.alongKN).toBeCloseTo(1, 9);
     }
   });
@@ -154,12 +154,12 @@ describe('ratchetPressure(height, range, factor)', () => {
   });
 });
 
-describe('wallNodes(shape, end)', () => {
+describe('frameShape(task)', () => {
   it('runs from the foot to the soffit on both sides', () => {
     const shape = frameShape(task(20, 0.7));
-    const first = wallNodes(shape, 0).map((i) => shape.nodes[i]![1]);
-    const last = wallNodes(shape, 1).map((i) => shape.nodes[i]![1]);
-    expect(first[0]).toBeCloseTo(-shape.heightM[0], 9);
+    const first = shape.walls[0]!.nodes.map((i) => shape.nodes[i]![1]);
+    const last = shape.walls[1]!.nodes.map((i) => shape.nodes[i]![1]);
+    expect(first[0]).toBeCloseTo(-shape.walls[0]!.heightM, 9);
     expect(first.at(-1)).toBeCloseTo(-shape.kneeM, 9);
     expect([...last].reverse()).toEqual(first);
   });
