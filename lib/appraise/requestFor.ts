@@ -20,8 +20,6 @@ function spanBand(form: FormId, site: Site): Pick<Windows, 'minSpanM' | 'maxSpan
 function continuousWindows(form: FormId, site: Site): Windows {
   const { pattern } = formModule(form);
   const mostSpans = pattern.kind === 'continuous' ? pattern.mostSpans : undefined;
-  // A unit of one span has no end spans.
-  if (mostSpans === 1) return { ...spanBand(form, site), mostSpans };
   // Of two spans each is an end span, and the shorter is never more than the longer.
   const endRatio = mostSpans === 2 ? ([leastOfTwoSpans(form), 1] as const) : endRatioWindow(form);
   if (endRatio === null) throw new RangeError(`no end span window in the rules of ${form}`);

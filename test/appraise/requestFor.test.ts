@@ -13,11 +13,10 @@ describe('requestFor', () => {
       const { pattern, methods, mostSpanM = Infinity } = formModule(form);
       const request = requestFor({ form, method: methods[0] }, site);
       const unit = pattern.kind === 'continuous' ? request.windows : request.approach!;
-      const single = pattern.kind === 'continuous' && pattern.mostSpans === 1;
-      expect(unit.endRatio).toEqual(single ? undefined : [0.5, 1]);
+      expect(unit.endRatio).toEqual([0.5, 1]);
       expect(request.windows.minSpanM).toBeGreaterThan(0);
       expect(request.windows.maxSpanM).toBeLessThanOrEqual(mostSpanM);
-      expect(request.windows.endRatio !== undefined).toBe(pattern.kind === 'continuous' && !single);
+      expect(request.windows.endRatio !== undefined).toBe(pattern.kind === 'continuous');
     },
   );
 });

@@ -61,7 +61,7 @@ describe('withPierAdded(study, option, span, chainageM)', () => {
     expect(now.supportsM[now.pylons![0]!]).toBe(at);
   });
 
-  it('is refused beside a support, where there is no span, and in a form of one span', () => {
+  it('is refused beside a support, where there is no span, and in a form of two spans that has them', () => {
     expect(withPierAdded(numbered, option, 0, start[0]! + 1)).toMatchObject({
       ok: false,
       why: expect.stringContaining('2 m from the next support') as string,
@@ -71,11 +71,11 @@ describe('withPierAdded(study, option, span, chainageM)', () => {
     const frame = {
       ...option,
       form: 'portal-frame' as const,
-      units: [{ form: 'portal-frame' as const, role: 'main' as const, supportsM: [1240, 1470] }],
+      units: [{ form: 'portal-frame' as const, role: 'main' as const, supportsM: [1240, 1355, 1470] }],
     };
     expect(withPierAdded(numbered, frame, 0)).toMatchObject({
       ok: false,
-      why: expect.stringContaining('no more') as string,
+      why: expect.stringContaining('2 spans and no more') as string,
     });
   });
 });
