@@ -4,7 +4,7 @@ import { linearAxis, spreadValues } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { interval } from '../drawing/interval.ts';
 import { label } from '../drawing/label.ts';
-import { wrapText } from '../drawing/lettering.ts';
+import { textWidth, wrapText } from '../drawing/lettering.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
@@ -125,11 +125,21 @@ export function costIntervals(input: CostIntervalsInput): Piece {
   const priceX = right + 72;
   const withinX = priceX + 78;
   const figure = { size: letters.table } as const;
+  const limit = budget === null ? NaN : axis.x(budget);
+  /** Middle of a median's figure: beside the line of the budget where that would run through it, on its own side. */
+  const clearOf = (x: number, text: string): number => {
+    const reach = textWidth(text, letters.table, 600) / 2 + 4;
+    if (!(Math.abs(x - limit) < reach)) return x;
+    return x < limit ? limit - reach : limit + reach;
+  };
   return sheet(widthPx, bottom + 8, 'Cost of each option, 10, 50 and 90 per cent, against the budget', [
     ink.defs.length > 0 && el('defs', {}, ink.defs),
     gridUprights(axis.ticks.map(axis.x), head - 6, bottom),
-    axis.ticks.map((tick) =>
-      label(axis.x(tick), head - 12, String(tick / unit.per), { anchor: 'middle', fill: colours.second }),
+    axis.ticks.map(
+      (tick) =>
+        // A figure under the line of the budget could not be read.
+        !(Math.abs(axis.x(tick) - limit) < 9) &&
+        label(axis.x(tick), head - 12, String(tick / unit.per), { anchor: 'middle', fill: colours.second }),
     ),
     label(
       narrow ? 0 : left - 24,
@@ -177,7 +187,7 @@ export function costIntervals(input: CostIntervalsInput): Piece {
           figure: ofOption(option, 'cost/p90'),
         }),
         interval(option, axis.x, y, ink, 9),
-        label(axis.x(p50), y - 10, money2(p50 / unit.per), {
+        label(clearOf(axis.x(p50), money2(p50 / unit.per)), y - 10, money2(p50 / unit.per), {
           ...figure,
           anchor: 'middle',
           weight: 600,

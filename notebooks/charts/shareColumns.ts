@@ -45,7 +45,7 @@ export function shareColumns(input: ShareColumnsInput): Piece {
     classes.flatMap(({ form }) => form ?? []),
     input.prefix ?? 'shares',
   );
-  const left = narrow ? 148 : 210;
+  const left = narrow ? 158 : 210;
   const columnPx = (widthPx - left) / buckets.length;
   const barPx = columnPx - 28;
   const head = 40;

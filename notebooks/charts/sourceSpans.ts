@@ -155,7 +155,7 @@ export function sourceSpans(input: SourceSpansInput): Piece {
   const { narrow, left, numberX, wordsX, size, x, words, lineHeights, rowHeights, tops, bottom } =
     layoutOf(input);
   const ticks = [5, 10, 20, 50, 100, 200, 500, 1000, 2000].filter(
-    (m) => m >= input.axisM[0] && m <= input.axisM[1] && (!narrow || m !== 10),
+    (m) => m >= input.axisM[0] && m <= input.axisM[1] && (!narrow || (m !== 10 && m !== 1000)),
   );
 
   return sheet(widthPx, bottom + 20, 'What single sources say of the span of each form', [
@@ -174,7 +174,7 @@ export function sourceSpans(input: SourceSpansInput): Piece {
     gridUprights(ticks.map(x), HEAD_PX - 6, bottom),
     ticks.map((m) =>
       label(x(m), HEAD_PX - 10, fixed(m, 0), {
-        anchor: narrow && x(m) < 10 ? 'start' : 'middle',
+        anchor: narrow && x(m) < 10 ? 'start' : narrow && x(m) > widthPx - 14 ? 'end' : 'middle',
         fill: colours.second,
       }),
     ),

@@ -4,14 +4,16 @@ import { dataFigure, ofOption } from '../drawing/asked.ts';
 import { linearAxis } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
+import { textWidth } from '../drawing/lettering.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
+import { placer } from '../drawing/placer.ts';
 import type { FormInk } from '../forms/formInk.ts';
 import { optionNumber } from '../forms/optionNumber.ts';
 import type { AppraisedOption, Spread } from '../model.ts';
 import { dominatedSide, edgeOf, undominated } from './edge.ts';
 import type { OptionsInput } from './rowHead.ts';
-import type { Place } from './standOff.ts';
+import type { PanelRoom, Place } from './standOff.ts';
 import { standOff } from './standOff.ts';
 
 /** One thing to weigh against cost; less is better. */
@@ -76,6 +78,41 @@ function mark(
   );
 }
 
+/** Name of the limit over its line or under it, at the right or as far left of that as it takes to cover no number. */
+function limitName(
+  text: string,
+  y: number,
+  { left, right, top, bottom }: PanelRoom,
+  numbers: readonly { readonly x: number; readonly y: number; readonly reach: number }[],
+  accent: string,
+): Piece {
+  const room = placer({ left, right, top, bottom });
+  for (const { x, y: at, reach } of numbers)
+    room.take({ left: x - reach, right: x + reach, top: at - reach, bottom: at + reach });
+  const size = letters.table;
+  const width = textWidth(text, size, 600);
+  const places: { readonly x: number; readonly base: number }[] = [];
+  for (let x = right - width; x >= left; x -= 12) places.push({ x, base: y - 5 }, { x, base: y + 14 });
+  const chosen =
+    places[
+      room.choose(
+        places.map(({ x, base }) => ({
+          left: x,
+          right: x + width,
+          top: base - 0.7 * size,
+          bottom: base + 1,
+        })),
+      )
+    ] ?? places[0]!;
+  return label(chosen.x + width, chosen.base, text, {
+    anchor: 'end',
+    size,
+    weight: 600,
+    fill: accent,
+    halo: true,
+  });
+}
+
 /** One measure against cost: dominated side, spreads, edge, limit and numbers. */
 export function panel(
   input: TradeOffsInput,
@@ -85,6 +122,7 @@ export function panel(
   right: number,
   top: number,
   y: (money: number) => number,
+  limitWords: string | null,
 ): Piece {
   const known = input.options.filter((option) => measure.values[option.number] !== undefined);
   const spread = (option: AppraisedOption): Spread =>
@@ -119,6 +157,13 @@ export function panel(
     // Clear of the name of the panel.
     top: top + 8,
     bottom,
+  });
+  const numbers = places.flatMap(({ x, y: at, option }) => {
+    const stand = offs.get(option.number) ?? { x, y: at };
+    return [
+      { x: stand.x, y: stand.y, reach: 11 },
+      { x, y: at, reach: 4 },
+    ];
   });
   const path = (run: readonly (readonly [number, number])[]): string =>
     run.length === 0 ? '' : `M${run.map(([a, b]) => `${num(a)},${num(b)}`).join('L')}`;
@@ -187,6 +232,9 @@ export function panel(
             [measure.figures?.(place.option) ?? [], ofOption(place.option, 'cost/p50')].flat(),
           );
     }),
+    input.budget !== null &&
+      limitWords !== null &&
+      limitName(limitWords, y(input.budget), { left, right, top, bottom }, numbers, ink.accent),
     measure.onEdge !== undefined &&
       edgeShares(input, measure.onEdge, best, ink, left, bottom + 38, right - left),
   );

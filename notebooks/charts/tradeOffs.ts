@@ -1,7 +1,7 @@
 import { scaleLog } from 'd3-scale';
 import { fixed, money2, moneyUnit, plain } from '../format.ts';
 import { ofOption } from '../drawing/asked.ts';
-import { colours, letters, pens } from '../drawing/ink.ts';
+import { colours, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
@@ -75,16 +75,10 @@ export function tradeOffs(input: TradeOffsInput): Piece {
               moneyRoom + index * (panelWidth + gap) + panelWidth,
               top,
               y,
+              // Said once in a line: it goes on through all panels.
+              budget === null || index > 0 ? null : `budget ${plain(budget / unit.per)}`,
             ),
           ),
-          budget !== null &&
-            label(moneyRoom + panelWidth, y(budget) - 5, `budget ${plain(budget / unit.per)}`, {
-              anchor: 'end',
-              size: letters.table,
-              weight: 600,
-              fill: ink.accent,
-              halo: true,
-            }),
         );
       }),
     ],

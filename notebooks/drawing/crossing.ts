@@ -11,7 +11,7 @@ import { barredDimension, barredWash, clearances, envelopes } from './clearances
 import type { Room } from './crossingLetters.ts';
 import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
-import { datumBelow, datumLine } from './datumLine.ts';
+import { datumBelow, datumBox, datumLine } from './datumLine.ts';
 import { dimensionChain } from './dimension.ts';
 import { chainagesShown, elevationBody, levelRange, optionWords, scaleOnSheet } from './elevation.ts';
 import { elevationText } from './elevationText.ts';
@@ -159,6 +159,8 @@ export function crossing(input: CrossingInput): Piece {
     placer: placer({ left: 0, top: 0, right: width, bottom: bottomY }),
   };
   takeRoom(site, option, frame, room.placer);
+  const datum = datumBelow(frame, bottomY + 5);
+  room.placer.take(datumBox(frame, datum), 3);
 
   const list = envelopes(site, input.obstacles).filter(
     (one) => one.toM > shown.fromM && one.fromM < shown.toM,
@@ -181,13 +183,14 @@ export function crossing(input: CrossingInput): Piece {
   const ends = option === null ? site : siteOf(site, option.units);
   const isShorter = option?.startM !== undefined;
   const total = fixed(ends.lengthM, 1);
-  const datum = datumBelow(frame, bottomY + 5);
   const band = withBand
     ? dataBand(site, option, frame, datum.y, { accent: ink.accent, datumM: datum.levelM })
     : null;
   const afterBand = datum.y + (band?.height ?? 0);
   const height = afterBand + (withBar ? (width < 620 ? 56 : 42) : 4);
   const clip = `${prefix}-window`;
+  // What stands at the abutments may reach past the sheet; a stretch ends with it.
+  const over = input.window === undefined ? 14 : 0;
   const figureWidth = Math.max(...figures.map((figure) => textWidth(figure, letters.table)));
   const bodyEnd = frame.y(range.bottomM);
   const hands = small ? undefined : input.handles;
@@ -207,7 +210,11 @@ export function crossing(input: CrossingInput): Piece {
         'defs',
         {},
         ink.defs,
-        el('clipPath', { id: clip }, el('rect', { x: -14, y: 0, width: width + 28, height: bottomY + 5 })),
+        el(
+          'clipPath',
+          { id: clip },
+          el('rect', { x: -over, y: 0, width: width + 2 * over, height: bottomY + 5 }),
+        ),
       ),
       g(
         { 'clip-path': `url(#${clip})` },

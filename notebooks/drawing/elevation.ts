@@ -99,8 +99,29 @@ export const crossingScale = (site: Site, widthPx: number, margin = sideMargin):
 export const scaleOnSheet = (site: Site, widthPx: number): Scale =>
   crossingScale(site, widthPx, widthPx < 700 ? 2 : widthPx < 960 ? 5 : widthPx < 1200 ? sideMargin : 7);
 
+/** Width of a full sheet, px: body and note margin together. */
+export const fullSheetPx = 1224;
+
+/** The smallest scale a narrow sheet may drop to: at smaller ones a deck is no more than a line. */
+export const leastScale = (onFullSheet: Scale): Scale => (onFullSheet > 5000 ? onFullSheet : 5000);
+
+/**
+ * Scale of a whole crossing in a room of some width, px, and the width its sheet then takes: wider than the room where
+ * the scale would drop too low in it, to be pushed sideways.
+ */
+export function sheetIn(site: Site, roomPx: number): { readonly scale: Scale; readonly widthPx: number } {
+  const scale = scaleOnSheet(site, roomPx);
+  const least = leastScale(scaleOnSheet(site, fullSheetPx));
+  if (scale <= least) return { scale, widthPx: roomPx };
+  return { scale: least, widthPx: wholeWidth(site, least) };
+}
+
+/** Width of a sheet that holds a whole crossing at a scale, px. */
+export const wholeWidth = (site: Site, scale: Scale): number =>
+  Math.ceil(site.lengthM * pxPerMetre(scale)) + 2 * sideMargin;
+
 /** Whether a crossing is drawn at a larger scale when it takes the note margin too. */
-export const wantsWidth = (site: Site): boolean => scaleOnSheet(site, 1224) < scaleOnSheet(site, 980);
+export const wantsWidth = (site: Site): boolean => scaleOnSheet(site, fullSheetPx) < scaleOnSheet(site, 980);
 
 export interface ElevationInput {
   readonly site: Site;

@@ -6,8 +6,9 @@ import type { Asked } from './asked.ts';
 import { overOf } from './asked.ts';
 import { uprightDimension } from './dimension.ts';
 import type { Paper } from './ink.ts';
-import { colours, pens } from './ink.ts';
+import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
 import { levelMark } from './levelMark.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
@@ -130,25 +131,11 @@ export function ladder(input: LadderInput): Piece {
   const unit = placedUnits(option).find(({ fromM, toM }) => at >= fromM - 1e-6 && at <= toM + 1e-6);
   const form = unit?.unit.form ?? option.form;
   const ink = formInk(input.paper ?? 'colour', [form], input.prefix ?? 'ladder');
-  const left = 96;
-  const right = left + 112;
-  const middle = (left + right) / 2;
-  const markX = right + 30;
   const v = ladderLevels(site, option, at, 26);
   const datum = obstacle.clearance?.datumLevelM ?? NaN;
   const rail = obstacle.kind === 'railway';
   const tooLow = v.spare < -0.005;
   const spareWords = tooLow ? `${level(-v.spare)} too low` : `${level(v.spare)} spare`;
-  const face = (y0: number, y1: number, fill: string, stroke: string): Piece =>
-    el('rect', {
-      x: left,
-      y: y0,
-      width: right - left,
-      height: Math.max(0, y1 - y0),
-      fill,
-      stroke,
-      'stroke-width': pens.thin,
-    });
   const rungs: Rung[] = [
     {
       top: v.yRoad,
@@ -190,6 +177,21 @@ export function ladder(input: LadderInput): Piece {
       ? [{ top: v.yLeast, bottom: v.yDatum, words: level(v.least - datum), colour: ink.accent }]
       : []),
   ];
+  const wide = Math.max(...rungs.map(({ words }) => textWidth(words, letters.drawing)));
+  const left = Math.max(96, Math.ceil(wide) + 24);
+  const right = left + 112;
+  const middle = (left + right) / 2;
+  const markX = right + 30;
+  const face = (y0: number, y1: number, fill: string, stroke: string): Piece =>
+    el('rect', {
+      x: left,
+      y: y0,
+      width: right - left,
+      height: Math.max(0, y1 - y0),
+      fill,
+      stroke,
+      'stroke-width': pens.thin,
+    });
   const datumWords = rail ? 'rail' : obstacle.kind === 'river' ? 'water' : obstacle.kind;
   return sheet(
     380,

@@ -107,7 +107,7 @@ export function narrowStack(shared: StackSheet): Piece {
   const budget =
     input.budget === null ? '' : `Heavy tick: budget ${plain(input.budget / unit.per)} ${unit.label}. `;
   return sheet(
-    input.widthPx + stackOutset,
+    shared.sheetPx + stackOutset,
     top + 30,
     `Elevations of ${String(input.options.length)} options on one scale, with their cost; choose one to compare the others with it`,
     [
@@ -116,7 +116,7 @@ export function narrowStack(shared: StackSheet): Piece {
         { transform: `translate(${String(stackOutset)} 0)` },
         rows.map(({ bottom }) =>
           el('path', {
-            d: `M0,${num(bottom + 2)}H${num(input.widthPx)}`,
+            d: `M0,${num(bottom + 2)}H${num(shared.sheetPx)}`,
             stroke: colours.grid,
             'stroke-width': pens.thin,
           }),

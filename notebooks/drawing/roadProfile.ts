@@ -4,7 +4,7 @@ import type { AppraisedOption, Site } from '../model.ts';
 import { roadBends, roadLevel, supportChainages, supportName } from './alongOption.ts';
 import { overOf } from './asked.ts';
 import { barredWash } from './clearances.ts';
-import { datumBelow, datumLine } from './datumLine.ts';
+import { datumBelow, datumBox, datumLine } from './datumLine.ts';
 import { optionWords } from './elevation.ts';
 import { frameOf, type Frame } from './frame.ts';
 import type { Paper } from './ink.ts';
@@ -143,6 +143,7 @@ export function roadProfile(input: RoadProfileInput): Piece {
   const datum = datumBelow(tall, bottom);
   const rowTop = datum.y;
   const room = placer({ left: 0, right: widthPx, top: 0, bottom: datum.y - 2 });
+  room.take(datumBox(frame, datum), 3);
   const along = (fromM: number, toM: number): (readonly [number, number])[] =>
     [fromM, ...roadBends(option, fromM, toM, tall.pxPerM), toM].map(
       (at) => [frame.x(at), y(roadLevel(option, at))] as const,
@@ -176,13 +177,15 @@ export function roadProfile(input: RoadProfileInput): Piece {
     named.add(index);
     lastX = frame.x(at);
   });
-  const figure = (at: number, text: string, base: number, asked?: string): Piece =>
-    label(Math.min(Math.max(frame.x(at), 18), widthPx - 18), base, text, { anchor: 'middle', figure: asked });
-  // Chainages and levels stand where a figure has room beside the ones before.
+  // Figures at the edge of the sheet and at the names of the rows step inside: they say their chainage.
+  const stand = (at: number): number => Math.min(Math.max(frame.x(at), 48), widthPx - 18);
+  // Chainages and levels stand where a figure has room beside the ones before; those of the abutments always.
   const placed: number[] = [];
-  for (const at of [site.startM, site.endM, ...within])
-    if (placed.every((other) => Math.abs(frame.x(other) - frame.x(at)) > 40) && frame.x(at) > 44)
-      placed.push(at);
+  for (const at of [site.startM, site.endM, ...within]) {
+    const isEnd = at === site.startM || at === site.endM;
+    if (!isEnd && stand(at) !== frame.x(at)) continue;
+    if (placed.every((other) => Math.abs(stand(other) - stand(at)) > 40)) placed.push(at);
+  }
   const rowsAt = rowTop + ROW_PX;
   const height = rowsAt + 34 + 42;
   const rule = (at: number, pen: number, colour: string): Piece =>
@@ -264,17 +267,15 @@ export function roadProfile(input: RoadProfileInput): Piece {
       label(2, rowsAt + 28, 'road', { fill: colours.second }),
       placed.map((at) => [
         el('path', {
-          d: `M${num(frame.x(at))},${num(rowTop)}v${num(ROW_PX)}`,
+          d: `M${num(frame.x(at))},${num(rowTop)}v${num(stand(at) > frame.x(at) ? 4 : ROW_PX)}`,
           stroke: colours.ink,
           'stroke-width': pens.thin,
         }),
-        figure(at, chainage(at), rowsAt + 12),
-        figure(
-          at,
-          level(roadLevel(option, at)),
-          rowsAt + 28,
-          at >= site.startM && at <= site.endM ? overOf(option, at, 'roadM') : undefined,
-        ),
+        label(stand(at), rowsAt + 12, chainage(at), { anchor: 'middle' }),
+        label(stand(at), rowsAt + 28, level(roadLevel(option, at)), {
+          anchor: 'middle',
+          figure: at >= site.startM && at <= site.endM ? overOf(option, at, 'roadM') : undefined,
+        }),
       ]),
       rule(rowsAt + 34, pens.medium, colours.ink),
       scaleBar(scale, Math.max(frame.x(site.startM), 8), rowsAt + 34 + 26, {

@@ -102,6 +102,9 @@ export function section(input: SectionInput): Piece {
     y: (zM) => topY + (extent.top - zM) * ppm,
   };
   const bottomY = place.y(extent.bottom);
+  const halfAt = `half at ${cuts.left.at}`;
+  /** Between the names of the halves; where a half is narrower than its name, they stand a little to the right. */
+  const halvesX = Math.max(place.x(0), textWidth(halfAt, letters.drawing) + 10);
   const webs = webPlaces(cuts.left.shapes);
   const edges = [
     ...(webs.some((x) => Math.abs(x) > widthM / 2) ? [] : [-widthM / 2]),
@@ -130,12 +133,8 @@ export function section(input: SectionInput): Piece {
     el('path', { d: extensions, stroke: colours.rule, 'stroke-width': pens.fine, fill: 'none' }),
     cutPiece(design, place, ink, prefix, topY, bottomY, input.at),
     cuts.right !== null && [
-      label(place.x(0) - 10, topY - 6, `half at ${cuts.left.at}`, {
-        anchor: 'end',
-        fill: colours.second,
-        halo: true,
-      }),
-      label(place.x(0) + 10, topY - 6, `half at ${cuts.right.at}`, { fill: colours.second, halo: true }),
+      label(halvesX - 10, topY - 6, halfAt, { anchor: 'end', fill: colours.second, halo: true }),
+      label(halvesX + 10, topY - 6, `half at ${cuts.right.at}`, { fill: colours.second, halo: true }),
     ],
     dimensionChain([place.x(-widthM / 2), place.x(widthM / 2)], 16, [level(widthM)], {
       weight: 600,

@@ -6,6 +6,19 @@ import { el } from './piece.ts';
 export const lettering = "'Overpass Variable', Overpass, 'DejaVu Sans', sans-serif";
 
 /**
+ * A drawing where its sheet fits the room, px; else in a part that is pushed sideways, under the name `label`. `className`
+ * is added to that part.
+ */
+export const inRoom = (drawing: Piece, roomPx: number, label: string, className = ''): Piece =>
+  Number(drawing.attrs['width']) <= roomPx
+    ? drawing
+    : el(
+        'div',
+        { class: `pushed ${className}`.trimEnd(), tabindex: 0, role: 'region', 'aria-label': label },
+        drawing,
+      );
+
+/**
  * Root of a drawing: true size in px (96 to the inch), named for readers who cannot see it.
  * @param told what it shows in words, with the id they go under
  * @param role `img` for a drawing as a whole; `group` where parts of it can be chosen

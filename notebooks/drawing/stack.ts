@@ -2,7 +2,7 @@ import { moneyUnit } from '../format.ts';
 import type { AppraisedOption, Site } from '../model.ts';
 import { formInk } from '../forms/formInk.ts';
 import { linearAxis, spreadValues } from './axis.ts';
-import { chainagesShown, crossingScale } from './elevation.ts';
+import { chainagesShown, crossingScale, fullSheetPx, leastScale, wholeWidth } from './elevation.ts';
 import { narrowStack } from './narrowStack.ts';
 import type { Piece } from './piece.ts';
 import type { Scale } from './scale.ts';
@@ -15,7 +15,10 @@ export type { StackInput } from './stackSheet.ts';
 /** Where the axis of cost starts, right of the elevations, px. */
 const costStart = 100;
 
-/** Scale of the elevations of a stack, the stretch they show and their width: what stands under them takes the same. */
+/**
+ * Scale of the elevations of a stack, the stretch they show and their width: what stands under them takes the same. On a
+ * sheet too narrow for a long crossing they are wider than it, and pushed sideways.
+ */
 export function stackChainage(site: Site, widthPx: number, asked?: Scale) {
   const narrow = widthPx < narrowBelow;
   const costPx = narrow ? 0 : Math.min(244, Math.max(200, widthPx * 0.2));
@@ -23,9 +26,11 @@ export function stackChainage(site: Site, widthPx: number, asked?: Scale) {
   const beside = asked ?? crossingScale(site, bodyPx, narrow ? 2 : 16);
   // Long crossings take the whole width, under their costs, where that gains a scale.
   const whole = asked ?? crossingScale(site, widthPx, 16);
-  const isTall = !narrow && beside >= 5000 && whole < beside;
-  const scale = isTall ? whole : beside;
-  const drawnPx = isTall ? widthPx : bodyPx;
+  const least = asked ?? leastScale(crossingScale(site, fullSheetPx, 16));
+  const isPushed = Math.min(beside, whole) > least;
+  const isTall = !narrow && (isPushed || (beside >= 5000 && whole < beside));
+  const scale = isPushed ? least : isTall ? whole : beside;
+  const drawnPx = isPushed ? wholeWidth(site, least) : isTall ? widthPx : bodyPx;
   return { narrow, bodyPx, drawnPx, isTall, scale, shown: chainagesShown(site, drawnPx, scale) } as const;
 }
 
@@ -40,7 +45,11 @@ function layOut(input: StackInput): {
     input.options.flatMap((option) => option.units.map((unit) => unit.form)),
     input.prefix ?? 'stack',
   );
-  const { narrow, bodyPx, isTall, scale, shown } = stackChainage(input.site, input.widthPx, input.scale);
+  const { narrow, bodyPx, drawnPx, isTall, scale, shown } = stackChainage(
+    input.site,
+    input.widthPx,
+    input.scale,
+  );
   const largest = Math.max(0, ...input.options.map((option) => option.cost.p90));
   const values = spreadValues(
     input.options.map((option) => option.cost),
@@ -52,6 +61,7 @@ function layOut(input: StackInput): {
     scale,
     shown,
     isTall,
+    sheetPx: Math.max(input.widthPx, drawnPx),
     axis: narrow
       ? linearAxis(values, 4, input.widthPx - 4)
       : // Right of the prices per m2, so that the line of the budget does not run through them.

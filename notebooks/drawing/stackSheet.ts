@@ -47,6 +47,8 @@ export interface StackSheet {
   readonly shown: { readonly fromM: number; readonly toM: number };
   /** Elevations stand under their costs and take the whole width. */
   readonly isTall: boolean;
+  /** Width of the whole, px: that asked for, or more where the elevations are pushed sideways. */
+  readonly sheetPx: number;
   readonly axis: Axis;
   readonly unit: { readonly per: number; readonly label: string };
 }
@@ -88,7 +90,7 @@ export function chosenRow(
       'aria-describedby': told,
       x: -4,
       y: top + 2,
-      width: input.widthPx + 8,
+      width: shared.sheetPx + 8,
       height: bottom - top - 4,
       fill: colours.sheet,
       'fill-opacity': 0,

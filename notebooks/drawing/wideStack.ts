@@ -70,19 +70,25 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
   const within = input.standing.within[option.number];
   const limit = input.budget === null ? NaN : axis.x(input.budget);
   const second = { fill: colours.second, halo: true } as const;
-  // Words step aside where the budget line would run through them: to its right where there is room, else to its left.
-  const atRight = (text: string, baseline: number, size: number, from: number, figure: Asked): Piece => {
-    const width = textWidth(text, size);
-    const home = right - width;
-    const crossed = limit > home - 5 && limit < right + 5;
-    const x = !crossed
-      ? home
-      : limit + 6 + width <= right + 0.5
-        ? limit + 6
-        : limit - 6 - width >= from
-          ? limit - 6 - width
-          : home;
-    return label(x, baseline, text, { size, ...second, figure });
+  // Words step aside where the budget line would run through them: to its right where there is room, else to its left;
+  // where there is none either side, fewer of them.
+  const atRight = (
+    texts: readonly string[],
+    baseline: number,
+    size: number,
+    from: number,
+    figure: Asked,
+  ): Piece => {
+    const placed = texts.flatMap((text) => {
+      const width = textWidth(text, size);
+      const isFree = (x: number): boolean =>
+        x >= from && x + width <= right + 0.5 && !(limit > x - 5 && limit < x + width + 5);
+      const x = [right - width, limit + 6, limit - 6 - width].find(isFree);
+      return x === undefined ? [] : [{ x, text }];
+    })[0];
+    const text = texts[0]!;
+    const { x, text: words } = placed ?? { x: right - textWidth(text, size), text };
+    return label(x, baseline, words, { size, ...second, figure });
   };
   const price = `${significant(option.pricePerM2.withApproaches, 2)} ${currencySign(input.currency)}/m²`;
   return g(
@@ -94,7 +100,7 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
       figure: ofOption(option, 'cost/p50'),
     }),
     atRight(
-      `${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}`,
+      [`${money2(p10 / unit.per)} to ${money2(p90 / unit.per)}`],
       y,
       letters.table,
       left + 44,
@@ -109,7 +115,7 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
     label(left, y + 37, price, { size: letters.table, ...second, figure: perM2Of(option) }),
     within !== undefined &&
       atRight(
-        `${odds(within)} % within budget`,
+        [`${odds(within)} % within budget`, `${odds(within)} % within`, `${odds(within)} %`],
         y + 37,
         letters.drawing,
         left + textWidth(price, letters.table) + 10,
@@ -260,7 +266,7 @@ export function wideStack(shared: StackSheet, bodyPx: number): Piece {
   const first = rows[0]?.frame ?? frameOf(scale, shared.shown, 0, { levelM: 0, y: head });
   const height = bottom + stackFoot;
   return sheet(
-    input.widthPx + stackOutset,
+    shared.sheetPx + stackOutset,
     height,
     `Elevations of ${String(input.options.length)} options on one chainage and one scale, with their cost; choose one to compare the others with it`,
     [
@@ -275,7 +281,7 @@ export function wideStack(shared: StackSheet, bodyPx: number): Piece {
           ({ bottom: at }, index) =>
             index < rows.length - 1 &&
             el('path', {
-              d: `M0,${num(at + 3)}H${num(input.widthPx)}`,
+              d: `M0,${num(at + 3)}H${num(shared.sheetPx)}`,
               stroke: colours.grid,
               'stroke-width': pens.thin,
             }),

@@ -5,7 +5,9 @@ import { chooseReference, listenToStack, type ChooseReference } from '../drawing
 import { largestScale, pxPerMetre } from '../drawing/scale.ts';
 import { roadProfile } from '../drawing/roadProfile.ts';
 import { needTable, roadTable } from '../drawing/roadTable.ts';
+import { inRoom } from '../drawing/sheet.ts';
 import { stack, stackChainage, stackOnPaper } from '../drawing/stack.ts';
+import { stackOutset } from '../drawing/stackSheet.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
@@ -93,7 +95,7 @@ export function arrangementSection(
         return stackOnPaper(input, 960, FIRST_SHEET_PX).map((part) => h('div', { class: 'part' }, part));
       const { appraisal: of } = v.stacked;
       return [
-        stack({ ...input, hands: v.hands }),
+        inRoom(stack({ ...input, hands: v.hands }), room.widthPx + stackOutset, 'Elevations', 'with-bar'),
         drawn.length < all.length && outOf(of, reference),
         droppedBy(of),
       ];
@@ -137,7 +139,11 @@ export function arrangementSection(
         if (!v.reference) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
         const { drawnPx: widthPx, scale, shown } = stackChainage(v.site, room.widthPx);
         return [
-          roadProfile({ site: v.site, option: v.reference, widthPx, scale, shown, prefix: 'road' }),
+          inRoom(
+            roadProfile({ site: v.site, option: v.reference, widthPx, scale, shown, prefix: 'road' }),
+            room.widthPx,
+            'Road over the reference',
+          ),
           tableBehind(roadTable(v.reference), 'Table of the road'),
           v.site.soffitLimits.length > 0 &&
             tableBehind(needTable(v.site, v.reference), 'Table of the levels needed'),

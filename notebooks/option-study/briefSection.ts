@@ -1,7 +1,8 @@
 import type { Brief } from '../../lib/index.ts';
 import { crossing } from '../drawing/crossing.ts';
-import { wantsWidth } from '../drawing/elevation.ts';
+import { sheetIn, wantsWidth } from '../drawing/elevation.ts';
 import { plan } from '../drawing/plan.ts';
+import { inRoom } from '../drawing/sheet.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
 import { handsOn } from './handsOn.ts';
@@ -39,14 +40,18 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
     owns: [site],
     wide: (v) => wantsWidth(v.site),
     body: (v, room) =>
-      crossing({
-        site: v.site,
-        option: v.reference,
-        obstacles: v.brief.obstacles,
-        widthPx: room.widthPx,
-        prefix: 'crossing',
-        ...(!room.isPaper && { handles: v.hands }),
-      }),
+      inRoom(
+        crossing({
+          site: v.site,
+          option: v.reference,
+          obstacles: v.brief.obstacles,
+          ...sheetIn(v.site, room.widthPx),
+          prefix: 'crossing',
+          ...(!room.isPaper && { handles: v.hands }),
+        }),
+        room.widthPx,
+        'Crossing',
+      ),
     notes: (v) => [
       asItStandsNote(v.asItStands, v.books.currency),
       h(
@@ -90,7 +95,17 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
         shows: { site, reference },
         wide: (v) => wantsWidth(v.site),
         body: (v, room) =>
-          plan({ site: v.site, option: v.reference, widthPx: room.widthPx, prefix: 'plan', bar: true }),
+          inRoom(
+            plan({
+              site: v.site,
+              option: v.reference,
+              ...sheetIn(v.site, room.widthPx),
+              prefix: 'plan',
+              bar: true,
+            }),
+            room.widthPx,
+            'Plan',
+          ),
         notes: [
           h(
             'p',

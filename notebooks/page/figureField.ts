@@ -24,11 +24,11 @@ export interface FigureField {
 
 /** Builds the elements of a figure; what they do is said in `figureInput`. */
 export function figureField(spec: FigureSpec): FigureField {
-  const { label, unit, unknown, step = 1 } = spec;
+  const { label, unit, unknown, isSaid = false, step = 1 } = spec;
   const description = [
     `Arrow keys step ${step}, with Shift ${step * 10}, with Alt ${step / 10}`,
     'Enter keeps, Escape goes back',
-    ...(unknown === undefined ? [] : ['? for not known']),
+    ...(unknown === undefined ? [] : [`? for ${isSaid ? unknown : 'not known'}`]),
   ];
   const field = h('span', {
     class: 'fig',
@@ -63,7 +63,8 @@ export function figureField(spec: FigureSpec): FigureField {
       if (select && hasFocus()) selectAll();
     },
     dress(shown, origin, isRefused) {
-      field.className = `fig ${shown === 'unknown' ? 'unknown' : origin}${isRefused ? ' refused' : ''}`;
+      const isUnknown = shown === 'unknown' && !isSaid;
+      field.className = `fig ${isUnknown ? 'unknown' : origin}${isRefused ? ' refused' : ''}`;
       if (shown === 'unknown') field.removeAttribute('aria-valuenow');
       else field.setAttribute('aria-valuenow', String(shown));
       const words = writeFigure(shown, spec);

@@ -21,6 +21,8 @@ export interface FigureRules {
   readonly max?: Limit;
   /** Word that stands for not known; absent where that is no legal answer. */
   readonly unknown?: string;
+  /** That word says something known, e.g. 'the start': it is underlined as what was typed. */
+  readonly isSaid?: boolean;
 }
 
 export type ReadFigure =
