@@ -23,7 +23,7 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
   const { site, widthPx } = input;
   const reference = input.reference === option.number;
   const range = levelRange(site, option, false);
-  const titleY = top + 27;
+  const titleY = 27;
   const frame = frameOf(scale, shared.shown, 0, { levelM: range.topM, y: titleY + 12 });
   const ground = frame.y(range.bottomM);
   const chainages = supportChainages(option);
@@ -32,12 +32,12 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
   const spanY = ground + 12;
   const intervalY = spanY + 18;
   const figureY = intervalY + 22;
-  const bottom = figureY + 14;
+  const height = figureY + 14;
   const { p10, p50, p90 } = option.cost;
   const within = input.standing.within[option.number];
   const name = optionTitle(option).split(',')[0] ?? '';
   const second: { size: number; fill: string } = { size: letters.table, fill: colours.second };
-  const piece = chosenRow(shared, option, top, bottom, [
+  const piece = chosenRow(shared, option, top, height, [
     rowNumber(shared, option, 12, titleY - 6, 11.5),
     glyph(option.form, 32, titleY - 14, ink.line(option.form)),
     label(72, titleY, name, { size: letters.prose, weight: reference ? 600 : 400 }),
@@ -91,7 +91,7 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
         figure: withinOf(option),
       }),
   ]);
-  return { piece, bottom, frame };
+  return { piece, bottom: top + height, frame };
 }
 
 /** All rows under one another for a hand-held screen. */

@@ -53,18 +53,33 @@ export interface StackSheet {
   readonly unit: { readonly per: number; readonly label: string };
 }
 
+/** A row in its own measure: what stands in it begins at 0, and `chosenRow` puts it in its place. */
 export interface StackRow {
   readonly piece: Piece;
   readonly bottom: number;
   readonly frame: Frame;
 }
 
-/** One row as something that can be chosen: number, form, spans and cost are its name. */
+/** Words for an elevation as they were last found: an option that is not in hand stays the same. */
+const wordsLast = new WeakMap<AppraisedOption, { readonly site: Site; readonly words: string }>();
+
+function toldOf(site: Site, option: AppraisedOption): string {
+  const last = wordsLast.get(option);
+  if (last?.site === site) return last.words;
+  const words = elevationText(site, option);
+  wordsLast.set(option, { site, words });
+  return words;
+}
+
+/**
+ * One row as something that can be chosen: number, form, spans and cost are its name. What it holds is measured from its
+ * top: a row that only moves, because one above it has grown, stays the same drawing in another place.
+ */
 export function chosenRow(
   shared: StackSheet,
   option: AppraisedOption,
   top: number,
-  bottom: number,
+  height: number,
   children: readonly (Piece | null | false)[],
   hands: readonly (Piece | null)[] = [],
 ): Piece {
@@ -79,8 +94,9 @@ export function chosenRow(
       class: reference ? 'row reference' : 'row',
       'data-key': `row ${String(option.number)}`,
       'data-option': option.number,
+      transform: `translate(0 ${num(top)})`,
     },
-    el('desc', { id: told }, elevationText(input.site, option)),
+    el('desc', { id: told }, toldOf(input.site, option)),
     el('rect', {
       class: 'frame',
       role: 'button',
@@ -89,9 +105,9 @@ export function chosenRow(
       'aria-label': words,
       'aria-describedby': told,
       x: -4,
-      y: top + 2,
+      y: 2,
       width: shared.sheetPx + 8,
-      height: bottom - top - 4,
+      height: height - 4,
       fill: colours.sheet,
       'fill-opacity': 0,
       stroke: 'none',
@@ -100,7 +116,7 @@ export function chosenRow(
     hands,
     reference &&
       el('path', {
-        d: `M${num(2.65 / 2 - stackOutset)},${num(top + 4)}V${num(bottom - 4)}`,
+        d: `M${num(2.65 / 2 - stackOutset)},4V${num(height - 4)}`,
         stroke: shared.ink.accent,
         'stroke-width': pens.heavy,
       }),

@@ -5,10 +5,11 @@ import { spanPaths, spansOf, supportChainages } from './alongOption.ts';
 import { ofOption, perM2Of, rangeOf, withinOf, type Asked } from './asked.ts';
 import { barredBrackets, barredWash } from './clearances.ts';
 import { dimensionChain } from './dimension.ts';
-import { elevationBody, levelRange, type LevelRange } from './elevation.ts';
+import { elevationBody, levelRange } from './elevation.ts';
 import { frameOf, type Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { interval } from './interval.ts';
+import { isSame } from './isSame.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
 import { mainSpan, optionNote, optionTitle } from './optionWords.ts';
@@ -23,6 +24,7 @@ import {
   pierHandles,
   spanChanges,
   spanFigures,
+  type InHand,
 } from './pierHandles.ts';
 import { scaleBar } from './scaleBar.ts';
 import { sheet } from './sheet.ts';
@@ -124,45 +126,60 @@ function figures(shared: StackSheet, option: AppraisedOption, left: number, righ
   );
 }
 
-/** Elevations as they were last drawn, with everything they were drawn from. */
-const drawnLast = new WeakMap<
-  AppraisedOption,
-  { readonly from: readonly unknown[]; readonly piece: Piece }
->();
-
-/**
- * The elevation of an option in its row: the one drawn last where nothing it is drawn from has changed. While something is
- * dragged that holds for all but the reference, and a piece that is the same is passed over when the page is changed.
- */
-function elevationIn(shared: StackSheet, option: AppraisedOption, frame: Frame, range: LevelRange): Piece {
-  const { input, ink, scale } = shared;
-  const { site, paper, prefix } = input;
-  const { topM, bottomM, cutBelowM } = range;
-  const from = [site, paper, prefix, scale, frame.y(0), frame.fromM, frame.toM, topM, bottomM, cutBelowM];
-  const last = drawnLast.get(option);
-  if (last?.from.every((part, i) => Object.is(part, from[i])) === true) return last.piece;
-  const piece = elevationBody(site, option, frame, ink, range, { plain: scale >= 2000 });
-  drawnLast.set(option, { from, piece });
-  return piece;
+/** What of a row does not hang on the costs of the others, and where the rest of it goes, px. */
+interface Arranged {
+  readonly frame: Frame;
+  readonly drawn: readonly Piece[];
+  readonly dimensionY: number;
+  readonly figureY: number;
+  readonly height: number;
 }
 
-function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyPx: number): StackRow {
+/** Rows as they were last drawn, by stack and number, with everything they were drawn from. */
+const drawnLast = new Map<string, { readonly from: readonly unknown[]; readonly arranged: Arranged }>();
+
+/**
+ * Name, elevation and spans of an option in its row: those drawn last where nothing they are drawn from has changed. While
+ * something is dragged that holds for all but the reference, and with its answer for all that have come out the same; a
+ * piece that is the same is passed over when the page is changed.
+ */
+function arranged(shared: StackSheet, option: AppraisedOption, bodyPx: number, hands?: InHand): Arranged {
+  const { input, scale, shown, isTall } = shared;
+  const { site, paper, prefix } = input;
+  const isReference = input.reference === option.number;
+  const note = input.notes?.[option.number];
+  const from = [paper, scale, isTall, bodyPx, isReference, note, hands, shown, site, option];
+  const key = `${prefix ?? ''} ${String(option.number)}`;
+  const last = drawnLast.get(key);
+  const isAsBefore = last?.from.every((part, i) => isSame(part, from[i])) === true;
+  const now = isAsBefore ? last.arranged : arrange(shared, option, bodyPx, hands);
+  // What is the very same next time is found the quicker.
+  drawnLast.set(key, { from, arranged: now });
+  return now;
+}
+
+function arrange(
+  shared: StackSheet,
+  option: AppraisedOption,
+  bodyPx: number,
+  hands: InHand | undefined,
+): Arranged {
   const { input, scale, ink } = shared;
   const { site } = input;
   const range = levelRange(site, option, scale < 2000);
-  const titleY = top + 23;
+  const titleY = TITLE_PX;
   const { isTall } = shared;
   const frame = frameOf(scale, shared.shown, 0, {
     levelM: range.topM,
     y: titleY + (isTall ? COST_PX : 12),
   });
   const dimensionY = Math.max(frame.y(range.bottomM) + (isTall ? 14 : 6), titleY + 70);
-  const bottom = dimensionY + 12;
+  // On the half lines of the page: a pile that grows by little does not move all that stands below.
+  const height = Math.ceil((dimensionY + 12) / HALF_LINE_PX) * HALF_LINE_PX;
   const chainages = supportChainages(option);
   const spans = spansOf(option);
   const deckY = frame.y(option.profile.startLevelM);
   const narrowest = Math.min(...spans) * frame.pxPerM;
-  const hands = input.reference === option.number ? input.hands : undefined;
   const changes = spanChanges(option, hands?.hold ?? null);
   const written = (span: number, i: number): string => {
     const figure = length(span);
@@ -170,10 +187,10 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
     if (textWidth(whole, letters.table) + 6 < span * frame.pxPerM) return whole;
     return textWidth(figure, 11) + 3 < span * frame.pxPerM || span * frame.pxPerM > 26 ? figure : '';
   };
-  const figureY = isTall ? titleY : Math.min(Math.max(deckY + 10, titleY + 24), bottom - 42);
+  const figureY = isTall ? titleY : Math.min(Math.max(deckY + 10, titleY + 24), height - 42);
   const drawn = [
     title(shared, option, titleY, bodyPx),
-    elevationIn(shared, option, frame, range),
+    elevationBody(site, option, frame, ink, range, { plain: scale >= 2000 }),
     dimensionChain(chainages.map(frame.x), dimensionY, spans.map(written), {
       boldest: mainSpan(option),
       halo: true,
@@ -181,9 +198,21 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
       colour: colours.ink,
       asked: spanPaths(option),
     }),
-    figures(shared, option, bodyPx + 22, input.widthPx, figureY),
-    isTall && budgetLine(shared, figureY - 16, figureY + 26, false),
     barredPiers(site, option, frame, ink.accent),
+  ].filter((piece) => piece !== null);
+  return { frame, drawn, dimensionY, figureY, height };
+}
+
+/** A row whose top is at `top`. */
+function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyPx: number): StackRow {
+  const { input } = shared;
+  const { site } = input;
+  const hands = input.reference === option.number ? input.hands : undefined;
+  const { frame, drawn, dimensionY, figureY, height } = arranged(shared, option, bodyPx, hands);
+  const children = [
+    ...drawn,
+    figures(shared, option, bodyPx + 22, input.widthPx, figureY),
+    shared.isTall && budgetLine(shared, figureY - 16, figureY + 26, false),
     hands !== undefined && pierFeet(option, frame, dimensionY, hands.locked),
     hands !== undefined && freeBar(site, option, frame, dimensionY + 8, hands.hold),
   ];
@@ -196,8 +225,8 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
           depthHandle(site, option, frame, hands.hold),
           pierHandles(option, frame, hands),
         ];
-  const piece = chosenRow(shared, option, top, bottom, drawn, taken);
-  return { piece, bottom, frame };
+  const piece = chosenRow(shared, option, top, height, children, taken);
+  return { piece, bottom: top + height, frame };
 }
 
 function axisHead(shared: StackSheet, y: number, right: number): Piece {
@@ -238,6 +267,12 @@ function budgetLine(shared: StackSheet, top: number, bottom: number, words: bool
       }),
   );
 }
+
+/** Half a line of the prose, px. */
+const HALF_LINE_PX = 12;
+
+/** From the top of a row down to the foot of its name, px. */
+const TITLE_PX = 23;
 
 /** From the name of an option down to its elevation where its costs stand over that, px. */
 const COST_PX = 46;

@@ -1,7 +1,8 @@
 import { keyLine } from '../drawing/keyLine.ts';
 import { stationLine } from '../drawing/stationLine.ts';
 import type { StationMark } from '../drawing/stationLine.ts';
-import { toDom } from '../drawing/toDom.ts';
+import type { Piece } from '../drawing/piece.ts';
+import { redraw as redrawAs, toDom } from '../drawing/toDom.ts';
 import { h } from '../html.ts';
 import type { CellHost } from './cellHost.ts';
 import { isDragging } from './dragging.ts';
@@ -31,11 +32,11 @@ export interface StationLines {
 const pixels = (element: Element, property: string): number =>
   parseFloat(getComputedStyle(element).getPropertyValue(property));
 
-/** Top and middle of an element, px down from the top of the sheet. */
-const topOf = (element: Element, sheet: Element): number =>
-  element.getBoundingClientRect().top - sheet.getBoundingClientRect().top;
-const middleOf = (element: Element, sheet: Element): number =>
-  topOf(element, sheet) + element.getBoundingClientRect().height / 2;
+/** Makes a line stand in its place, or changes the one that stands there. */
+function drawIn(place: Element, piece: Piece): void {
+  const drawn = place.firstElementChild;
+  if (drawn === null || !redrawAs(drawn, piece)) place.replaceChildren(toDom(piece, document));
+}
 
 /**
  * Both lines of a page. Pointing at a cell, or having the focus in it, draws the spans to what it uses and to what
@@ -62,45 +63,50 @@ export function stationLines(
 
   /** How far below the top of its section the middle of each station was when it was last laid out, px. */
   const below = new WeakMap<CellHost, number>();
-  const placeOf = (host: CellHost, sectionTop: number): number => {
+  const placeOf = (host: CellHost, sheetTop: number, sectionTop: number): number => {
     // To ask for the place of what is off the screen would lay it out.
-    if (host.label.checkVisibility({ contentVisibilityAuto: true }) || !below.has(host))
-      below.set(host, middleOf(host.label, sheet) - sectionTop);
+    if (host.label.checkVisibility({ contentVisibilityAuto: true }) || !below.has(host)) {
+      const { top, height } = host.label.getBoundingClientRect();
+      below.set(host, top + height / 2 - sheetTop - sectionTop);
+    }
     return sectionTop + below.get(host)!;
   };
 
-  const marks = (): StationMark[] =>
+  /** Stations and posts, px down from the top of the sheet, which itself is so far down the screen. */
+  const marks = (sheetTop: number): StationMark[] =>
     sections().flatMap(({ number, element, hosts: cells }) => {
-      const top = topOf(element, sheet);
+      const top = element.getBoundingClientRect().top - sheetTop;
       return [
         // The post stands level with the rule over the section.
         { name: String(number), y: top, post: true },
         ...cells.map((host) => ({
           name: host.station,
-          y: placeOf(host, top),
+          y: placeOf(host, sheetTop, top),
           state: host.state(),
         })),
       ];
     });
 
-  const drawUpright = (): void => {
+  /** What the upright line is drawn from, read from the page. */
+  const uprightNow = () => {
     const top = -sheet.getBoundingClientRect().top;
-    const input = {
+    return {
       heightPx: sheet.clientHeight,
-      marks: marks(),
+      marks: marks(-top),
       ...(joined && { joined }),
       view: { top: Math.max(0, top), bottom: Math.min(sheet.clientHeight, top + window.innerHeight) },
       lineX: pixels(sheet, '--line'),
       bandPx: pixels(sheet, '--band'),
     };
+  };
+  const drawUpright = (input: ReturnType<typeof uprightNow>): void => {
     const said = JSON.stringify(input);
     if (said === drawnUpright) return;
     drawnUpright = said;
-    upright.replaceChildren(toDom(stationLine(input), document));
+    drawIn(upright, stationLine(input));
   };
 
-  const drawFlat = (): void => {
-    const widthPx = flat.clientWidth;
+  const drawFlat = (widthPx: number): void => {
     const said = JSON.stringify([widthPx, joined, hosts().length]);
     if (widthPx === 0 || said === drawnFlat) return;
     drawnFlat = said;
@@ -121,10 +127,13 @@ export function stationLines(
 
   const drawNow = (): void => {
     if (!sheet.isConnected) return;
+    // All is read before anything is written: what is asked in between lays the page out once more.
+    const input = uprightNow();
+    const widthPx = flat.clientWidth;
     const near = new Set([...(joined?.uses ?? []), ...(joined?.usedBy ?? []), joined?.at]);
     for (const { station, label } of hosts()) label.classList.toggle('joined', near.has(station));
-    drawUpright();
-    drawFlat();
+    drawUpright(input);
+    drawFlat(widthPx);
   };
   const redraw = (): void => frames.request(drawNow);
 

@@ -1,4 +1,4 @@
-import { options } from './fixture.ts';
+import { options, site } from './fixture.ts';
 import { standOff } from '../../notebooks/charts/standOff.ts';
 import { describe, expect, it } from 'vitest';
 import { dominatedSide, edgeOf, undominated } from '../../notebooks/charts/edge.ts';
@@ -6,10 +6,13 @@ import { flatStretch } from '../../notebooks/charts/depthCurve.ts';
 import { groupOdds } from '../../notebooks/charts/costIntervals.ts';
 import { logTicks } from '../../notebooks/charts/logTicks.ts';
 import { readAt } from '../../notebooks/drawing/alongOption.ts';
+import { sheetIn } from '../../notebooks/drawing/elevation.ts';
 import { textWidth, wrapText } from '../../notebooks/drawing/lettering.ts';
 import { el } from '../../notebooks/drawing/piece.ts';
 import { placer } from '../../notebooks/drawing/placer.ts';
 import { largestScale, pxPerMetre } from '../../notebooks/drawing/scale.ts';
+import { inRoom, sheet } from '../../notebooks/drawing/sheet.ts';
+import { stackChainage } from '../../notebooks/drawing/stack.ts';
 import { toSvgFile, toText } from '../../notebooks/drawing/toText.ts';
 import {
   chainage,
@@ -54,6 +57,35 @@ describe('standOff(places, reference, limitY, panel)', () => {
         .map(([number]) => number);
       expect(down).toEqual(down.toSorted((a, b) => a - b));
     }
+  });
+});
+
+describe('a long crossing on a narrow sheet', () => {
+  const long = { ...site, startM: 0, endM: 1400, lengthM: 1400 };
+  const longest = { ...site, startM: 0, endM: 3000, lengthM: 3000 };
+
+  it('sheetIn(site, roomPx) and stackChainage(site, widthPx) keep 1:5000 and take the width that needs', () => {
+    for (const roomPx of [1224, 868, 372]) {
+      const { scale, widthPx } = sheetIn(long, roomPx);
+      expect(scale).toBe(5000);
+      expect(widthPx).toBeGreaterThanOrEqual(Math.max(roomPx, 1400 * pxPerMetre(5000)));
+      const beside = stackChainage(long, roomPx);
+      expect(beside.scale).toBe(5000);
+      expect(beside.drawnPx).toBeGreaterThanOrEqual(1400 * pxPerMetre(5000));
+      expect(beside.shown.toM - beside.shown.fromM).toBeCloseTo(beside.drawnPx / pxPerMetre(5000), 6);
+    }
+    // One that a full sheet holds only at a smaller scale is drawn at that.
+    for (const roomPx of [1224, 868, 372])
+      expect(sheetIn(longest, roomPx).scale).toBe(stackChainage(longest, 1224).scale);
+    expect(sheetIn(site, 372).widthPx).toBe(372);
+  });
+
+  it('inRoom(drawing, roomPx, label) is pushed sideways only where it is wider than the room', () => {
+    const drawing = sheet(900, 40, 'a drawing', []);
+    expect(inRoom(drawing, 900, 'Crossing')).toBe(drawing);
+    const pushed = inRoom(drawing, 899, 'Crossing', 'with-bar');
+    expect(pushed.children).toEqual([drawing]);
+    expect(pushed.attrs).toMatchObject({ class: 'pushed with-bar', tabindex: '0', 'aria-label': 'Crossing' });
   });
 });
 
