@@ -22,7 +22,7 @@ import { el, g, num } from './piece.ts';
 const bandRow = 15.2;
 
 /** Room the row names take at the left, px. */
-const nameRoom = 40;
+const nameRoom = 46;
 
 /**
  * Chainages at which the band states its figures: supports first, then ends of limits and barred stretches, then bends

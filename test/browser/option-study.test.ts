@@ -1,6 +1,7 @@
 import type { Page } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
 import { oneStudyPage, settled } from './studyPage.ts';
+import { lookThrough, touching } from './touching.ts';
 
 const study = oneStudyPage();
 
@@ -90,6 +91,19 @@ describe('option study', () => {
       number,
     );
   });
+});
+
+it('no lettering touches other or leaves its sheet at 1024 and 400', async () => {
+  const { page } = study;
+  for (const width of [1024, 400]) {
+    await page.setViewportSize({ width, height: 900 });
+    await page.waitForFunction((px) => document.documentElement.clientWidth === px, width);
+    await settled(page);
+    await page.evaluate(lookThrough);
+    await settled(page);
+    expect(await page.evaluate(touching)).toEqual([]);
+  }
+  await page.setViewportSize({ width: 1440, height: 900 });
 });
 
 it('a table behind a chart is saved as CSV with plain figures', async () => {
