@@ -45,7 +45,7 @@ export function approachesTo(
     const same = list.find((known) => known.spans === spans);
     if (same !== undefined ? cost >= same.cost : list.length === KEPT && cost >= list[KEPT - 1]!.cost)
       return true;
-    const at = trace(end, spans);
+    const at = trace();
     const lengths = at.slice(1).map((i, s) => X[i]! - X[at[s]!]!);
     if (spanFault(lengths, limits) === null) insert(list, { cost, spans, at });
     return true;

@@ -55,9 +55,9 @@ export function continuousCandidates(
   };
   const found = new Map<string, Candidate>();
   const laid = new Set<string>();
-  const cut = searchUnit(task, table, (end, spans, governingM, estimate, trace) => {
+  const cut = searchUnit(task, table, (_, spans, governingM, estimate, trace) => {
     laid.add(`${governingM} ${spans}`);
-    const at = trace(end, spans);
+    const at = trace();
     const name = at.join();
     const known = found.get(name);
     if (known !== undefined && known.estimate <= estimate) return true;

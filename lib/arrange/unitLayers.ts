@@ -6,7 +6,7 @@ import type { UnitTask } from './unitTask.ts';
 interface Room {
   /** Predecessor of each position by the number of spans used to reach it, most spans x n. */
   readonly back: Int32Array;
-  /** Best closed layouts by number of spans and end, (most spans + 1) x ends: cost, last and last but one support. */
+  /** Best closed layouts of the last layer by end: cost, last and last but one support. */
   readonly closed: Float64Array;
   readonly closedZ: Int32Array;
   readonly closedY: Int32Array;
@@ -22,9 +22,9 @@ interface Room {
 export function roomFor(n: number, ends: number, most: number): Room {
   return {
     back: new Int32Array(most * n),
-    closed: new Float64Array((most + 1) * ends),
-    closedZ: new Int32Array((most + 1) * ends),
-    closedY: new Int32Array((most + 1) * ends),
+    closed: new Float64Array(ends).fill(Infinity),
+    closedZ: new Int32Array(ends),
+    closedY: new Int32Array(ends),
     S: new Float64Array(n),
     V: new Float64Array(n),
     Y: new Int32Array(n),
@@ -48,6 +48,9 @@ export interface Layers {
   readonly restPerM: number;
   /** Set once something was left out as too dear. */
   cut: boolean;
+  /** Ends between which the last layer closed layouts, counted from the first end. */
+  closedFrom: number;
+  closedTo: number;
 }
 
 /** Least that one more span costs for each metre of it: its deck and half the support it begins on. */
@@ -83,12 +86,32 @@ export function isTooDear(layers: Layers, cost: number, x: number): boolean {
   return true;
 }
 
-export function close(layers: Layers, k: number, end: number, cost: number, z: number, y: number): void {
-  const at = k * (layers.task.lastEnd - layers.task.firstEnd + 1) + end - layers.task.firstEnd;
+/** Keeps a closed layout of the last layer where it is the cheapest to its end. */
+export function close(layers: Layers, end: number, cost: number, z: number, y: number): void {
+  const at = end - layers.task.firstEnd;
   const { closed, closedZ, closedY } = layers.room;
   if (cost < closed[at]! - SLACK * Math.abs(cost)) {
     closed[at] = cost;
     closedZ[at] = z;
     closedY[at] = y;
+    layers.closedFrom = Math.min(layers.closedFrom, at);
+    layers.closedTo = Math.max(layers.closedTo, at);
   }
+}
+
+/** Hands on the closed layouts of the last layer by rising end and forgets them; false where no more are wanted. */
+export function handOn(
+  layers: Layers,
+  spans: number,
+  take: (end: number, spans: number, cost: number) => boolean,
+): boolean {
+  const { task, room, closedFrom, closedTo } = layers;
+  const { closed } = room;
+  let more = true;
+  for (let at = closedFrom; at <= closedTo && more; at += 1)
+    if (closed[at]! < Infinity) more = take(task.firstEnd + at, spans, closed[at]!);
+  closed.fill(Infinity, closedFrom, closedTo + 1);
+  layers.closedFrom = closed.length;
+  layers.closedTo = -1;
+  return more;
 }

@@ -2,22 +2,23 @@ import type { CostTable } from '../model/index.ts';
 import { aloneWorksAs, endWorksAs, halfCosts, spanCostAt, spanCosts } from './curves.ts';
 import { governingSpans, isFull, MORE_SPANS, mostSpans } from './governingSpans.ts';
 import { SLACK as sameShare } from './limits.ts';
-import { close, isTooDear, leastPerM, roomFor, type Layers } from './unitLayers.ts';
+import { close, handOn, isTooDear, leastPerM, roomFor, type Layers } from './unitLayers.ts';
 import type { UnitTask } from './unitTask.ts';
 import { worthOf } from './worth.ts';
 
 /** Read once: the loops below compare millions of spans. */
 const SLACK = sameShare;
 
-/** Called for every end, number of spans and governing span that can be laid out; `trace(end, spans)` gives the indices into
- * `X` while the call lasts.
- * Giving back false ends the search. */
+/**
+ * Called for every end, number of spans and governing span that can be laid out; `trace()` gives the indices into `X`
+ * while the call lasts. Giving back false ends the search.
+ */
 export type Visit = (
   end: number,
   spans: number,
   governingM: number,
   cost: number,
-  trace: (end: number, spans: number) => number[],
+  trace: () => number[],
 ) => boolean;
 
 /** Cost of the last span from z to the end, with the halves of the supports it carries. */
@@ -32,8 +33,8 @@ function lastSpan(layers: Layers, z: number, end: number): number {
   );
 }
 
-/** Layouts of one and two spans; fills the costs of reaching each first pier. */
-function firstTwo(layers: Layers, F: Float64Array): void {
+/** Layouts of one span; fills the costs of reaching each first pier. */
+function firstSpan(layers: Layers, F: Float64Array): void {
   const { task, G, aloneCost, endCost, half } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
   F.fill(Infinity);
@@ -41,19 +42,18 @@ function firstTwo(layers: Layers, F: Float64Array): void {
     const s = X[x]!;
     if (s < limits.minSpacingM - SLACK) continue;
     if (x >= firstEnd && x <= lastEnd && s >= limits.minSpanM - SLACK) {
-      close(
-        layers,
-        1,
-        x,
-        spanCostAt(aloneCost, s) + (task.endIsPier ? half.A[x]! + half.B[x]! * s : 0),
-        0,
-        0,
-      );
+      const alone = spanCostAt(aloneCost, s) + (task.endIsPier ? half.A[x]! + half.B[x]! * s : 0);
+      close(layers, x, alone, 0, 0);
     }
     const reached = spanCostAt(endCost, s) + half.A[x]! + half.B[x]! * s;
     if (!isTooDear(layers, reached, s)) F[x] = reached;
   }
-  if (layers.K < 2) return;
+}
+
+/** Layouts of two spans. */
+function twoSpans(layers: Layers, F: Float64Array): void {
+  const { task, G } = layers;
+  const { X, limits, firstEnd, lastEnd } = task;
   let low = 1;
   for (let end = firstEnd; end <= lastEnd; end += 1) {
     const xe = X[end]!;
@@ -64,13 +64,13 @@ function firstTwo(layers: Layers, F: Float64Array): void {
       const b = xe - a;
       if (b < limits.minSpacingM - SLACK) break;
       if (F[x] === Infinity || Math.min(a, b) < limits.endLeast * Math.max(a, b) - SLACK) continue;
-      close(layers, 2, end, F[x]! + lastSpan(layers, x, end), x, 0);
+      close(layers, end, F[x]! + lastSpan(layers, x, end), x, 0);
     }
   }
 }
 
 /** Closes layouts that end with an interior span onto z: for each end the cheapest one inside the end window. */
-function closeFrom(layers: Layers, k: number, z: number, n: number): void {
+function closeFrom(layers: Layers, z: number, n: number): void {
   const { task, G } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
   const { S, V, Y, queue } = layers.room;
@@ -92,7 +92,7 @@ function closeFrom(layers: Layers, k: number, z: number, n: number): void {
     while (head < tail && S[queue[head]!]! < shortest) head += 1;
     if (head < tail) {
       const best = queue[head]!;
-      close(layers, k, end, V[best]! + lastSpan(layers, z, end), z, Y[best]!);
+      close(layers, end, V[best]! + lastSpan(layers, z, end), z, Y[best]!);
     }
   }
 }
@@ -176,7 +176,31 @@ function listOnto(
   return count;
 }
 
-/** One more interior span onto every position it can reach: fills `next`, closes what can end. */
+/** First index from `low` on whose position is `x` or beyond. */
+function firstFrom(X: Float64Array, low: number, x: number): number {
+  let high = X.length;
+  let from = low;
+  while (from < high) {
+    const middle = (from + high) >> 1;
+    if (X[middle]! < x) from = middle + 1;
+    else high = middle;
+  }
+  return from;
+}
+
+/** First index from `low` on whose position is beyond `x`. */
+function firstBeyond(X: Float64Array, low: number, x: number): number {
+  let high = X.length;
+  let from = low;
+  while (from < high) {
+    const middle = (from + high) >> 1;
+    if (X[middle]! <= x) from = middle + 1;
+    else high = middle;
+  }
+  return from;
+}
+
+/** One more interior span onto every position it can reach: fills `next`, closes what can end. False where none can be reached. */
 function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array): boolean {
   const { task, G, K } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
@@ -193,14 +217,16 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
   const closes = X[firstEnd]! - G - SLACK;
   const onto: Onto = { from: -1, cost: Infinity };
   const { reached } = layers.room;
-  for (let y = 0; y < n; y += 1) reached[y] = F[y]! + layers.half.A[y]!;
-  next.fill(Infinity);
+  // Positions that j spans can reach move up with j: only these, and those a span before them, are looked at.
+  const first = firstFrom(X, 1, nearest);
+  const end = firstBeyond(X, first, farthest);
+  let low = firstFrom(X, 1, X[Math.min(first, n - 1)]! - G - SLACK);
+  for (let y = low; y < end; y += 1) reached[y] = F[y]! + layers.half.A[y]!;
+  next.fill(Infinity, low, end);
   let any = false;
-  let low = 1;
-  let high = 0;
-  for (let z = 1; z < n && X[z]! <= farthest; z += 1) {
+  let high = low - 1;
+  for (let z = first; z < end; z += 1) {
     const xz = X[z]!;
-    if (xz < nearest) continue;
     while (X[low]! < xz - G - SLACK) low += 1;
     while (X[high + 1]! <= xz - least) high += 1;
     const count =
@@ -208,7 +234,7 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
         ? cheapestOnto(layers, reached, low, high, z, onto)
         : listOnto(layers, j, F, low, high, z, onto);
     if (count === 0 || isTooDear(layers, onto.cost, xz)) continue;
-    if (xz >= closes) closeFrom(layers, j + 1, z, count);
+    if (xz >= closes) closeFrom(layers, z, count);
     any = true;
     next[z] = onto.cost;
     back[j * n + z] = onto.from;
@@ -216,24 +242,52 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
   return any;
 }
 
+/** Indices of the supports of the cheapest layout of k spans to an end, while its layer is the last one made. */
 function traceOf({ task, room }: Layers, k: number, end: number): number[] {
   const { back, closedZ, closedY } = room;
-  const at = k * (task.lastEnd - task.firstEnd + 1) + end - task.firstEnd;
-  const indices = [end];
-  if (k >= 2) indices.push(closedZ[at]!);
-  let y = closedY[at]!;
+  const n = task.X.length;
+  const at = new Array<number>(k + 1);
+  at[k] = end;
+  if (k >= 2) at[k - 1] = closedZ[end - task.firstEnd]!;
+  let y = closedY[end - task.firstEnd]!;
   for (let j = k - 2; j >= 1; j -= 1) {
-    indices.push(y);
-    y = j > 1 ? back[j * task.X.length + y]! : 0;
+    at[j] = y;
+    y = j > 1 ? back[j * n + y]! : 0;
   }
-  indices.push(0);
-  return indices.reverse();
+  at[0] = 0;
+  return at;
 }
 
 /** Every eighth first: the cheapest of a few spread over the band show early what is too dear. */
 function spreadFirst<T>(list: readonly T[]): T[] {
   const few = 8;
   return [...list.filter((_, i) => i % few === few >> 1), ...list.filter((_, i) => i % few !== few >> 1)];
+}
+
+/**
+ * Lays out one governing span, one layer of spans on the other, and hands on what each layer closes. False where
+ * `closed` wants no more.
+ */
+function layLayers(
+  layers: Layers,
+  F: Float64Array,
+  next: Float64Array,
+  closed: (end: number, spans: number, cost: number) => boolean,
+): boolean {
+  const { K } = layers;
+  firstSpan(layers, F);
+  if (!handOn(layers, 1, closed)) return false;
+  if (K < 2) return true;
+  twoSpans(layers, F);
+  if (!handOn(layers, 2, closed)) return false;
+  next.fill(Infinity);
+  let from = F;
+  let onto = next;
+  for (let j = 2; j < K && oneMore(layers, j, from, onto); j += 1) {
+    if (!handOn(layers, j + 1, closed)) return false;
+    [from, onto] = [onto, from];
+  }
+  return true;
 }
 
 /**
@@ -245,8 +299,8 @@ function spreadFirst<T>(list: readonly T[]): T[] {
 export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): ReadonlySet<number> {
   const n = task.X.length;
   const ends = task.lastEnd - task.firstEnd + 1;
-  let F: Float64Array = new Float64Array(n);
-  let next: Float64Array = new Float64Array(n);
+  const F = new Float64Array(n);
+  const next = new Float64Array(n);
   const governing = governingSpans(task).map((G) => ({ G, K: mostSpans(task, G) }));
   const room = roomFor(n, ends, Math.max(0, ...governing.map(({ K }) => K)));
   const worth = worthOf(ends === 1 ? (task.keep ?? Infinity) : Infinity);
@@ -278,23 +332,15 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
       boundCost,
       restPerM,
       cut: false,
+      closedFrom: ends,
+      closedTo: -1,
     };
-    room.closed.fill(Infinity, 0, (K + 1) * ends);
-    firstTwo(layers, F);
-    for (let j = 2; j < K; j += 1) {
-      if (!oneMore(layers, j, F, next)) break;
-      [F, next] = [next, F];
-    }
+    const more = layLayers(layers, F, next, (end, spans, own) => {
+      worth.add(spans, own + fixed);
+      return visit(end, spans, G, own + fixed, () => traceOf(layers, spans, end));
+    });
     if (layers.cut) cut.add(G);
-    const trace = (end: number, spans: number): number[] => traceOf(layers, spans, end);
-    for (let k = 1; k <= K; k += 1) {
-      for (let end = task.firstEnd; end <= task.lastEnd; end += 1) {
-        const own = room.closed[k * ends + end - task.firstEnd]!;
-        if (own === Infinity) continue;
-        worth.add(k, own + fixed);
-        if (!visit(end, k, G, own + fixed, trace)) return cut;
-      }
-    }
+    if (!more) break;
   }
   return cut;
 }
