@@ -15,8 +15,11 @@ interface Room {
   readonly V: Float64Array;
   readonly Y: Int32Array;
   readonly queue: Int32Array;
-  /** What it costs to begin one more span at each position. */
+  /** Places reached by the layer before, side by side: index, cost with half the support there, position, half support per metre. */
+  readonly at: Int32Array;
   readonly reached: Float64Array;
+  readonly x: Float64Array;
+  readonly perM: Float64Array;
 }
 
 export function roomFor(n: number, ends: number, most: number): Room {
@@ -29,7 +32,10 @@ export function roomFor(n: number, ends: number, most: number): Room {
     V: new Float64Array(n),
     Y: new Int32Array(n),
     queue: new Int32Array(n),
+    at: new Int32Array(n),
     reached: new Float64Array(n),
+    x: new Float64Array(n),
+    perM: new Float64Array(n),
   };
 }
 

@@ -104,37 +104,30 @@ interface Onto {
 }
 
 /**
- * The cheapest interior span from any of the positions low..high onto z, left in `onto`; gives back 0 where there is none.
- * `reached` is what it costs to begin a span at each position, its support included.
+ * The cheapest interior span from any of the reached places low..high onto z, left in `onto`; gives back 0 where there is
+ * none.
  */
-function cheapestOnto(
-  layers: Layers,
-  reached: Float64Array,
-  low: number,
-  high: number,
-  z: number,
-  onto: Onto,
-): number {
-  const { task, cost, half } = layers;
-  const { X } = task;
-  const { A, B } = half;
-  const xz = X[z]!;
-  const bz = B[z]!;
+function cheapestOnto(layers: Layers, low: number, high: number, z: number, onto: Onto): number {
+  const { task, cost, half, room } = layers;
+  const { at, reached, x, perM } = room;
+  const xz = task.X[z]!;
+  const bz = half.B[z]!;
   let best = Infinity;
   let from = -1;
-  for (let y = high; y >= low; y -= 1) {
-    const s = xz - X[y]!;
+  for (let p = high; p >= low; p -= 1) {
+    const s = xz - x[p]!;
     const i = s | 0;
     const deck = cost[i]! + (s - i) * (cost[i + 1]! - cost[i]!);
-    const v = reached[y]! + deck + (B[y]! + bz) * s;
+    const v = reached[p]! + deck + (perM[p]! + bz) * s;
     if (v < best && v < best - SLACK * v) {
       best = v;
-      from = y;
+      from = p;
     }
   }
-  onto.from = from;
-  onto.cost = best + A[z]!;
-  return from < 0 ? 0 : 1;
+  if (from < 0) return 0;
+  onto.from = at[from]!;
+  onto.cost = best + half.A[z]!;
+  return 1;
 }
 
 /**
@@ -153,17 +146,16 @@ function listOnto(
   const { task, cost, half, room } = layers;
   const { X, limits } = task;
   const { A, B } = half;
-  const { S, V, Y } = room;
+  const { at, S, V, Y } = room;
   const xz = X[z]!;
   let count = 0;
   onto.from = -1;
   onto.cost = Infinity;
-  for (let y = high; y >= low; y -= 1) {
-    const f = F[y]!;
-    if (f === Infinity) continue;
+  for (let p = high; p >= low; p -= 1) {
+    const y = at[p]!;
     const s = xz - X[y]!;
     if (j === 2 && (X[y]! < limits.endLeast * s - SLACK || X[y]! > limits.endMost * s + SLACK)) continue;
-    const v = f + spanCostAt(cost, s) + A[y]! + B[y]! * s + A[z]! + B[z]! * s;
+    const v = F[y]! + spanCostAt(cost, s) + A[y]! + B[y]! * s + A[z]! + B[z]! * s;
     S[count] = s;
     V[count] = v;
     Y[count] = y;
@@ -172,6 +164,23 @@ function listOnto(
       onto.cost = v;
       onto.from = y;
     }
+  }
+  return count;
+}
+
+/** Puts the places first..end - 1 that can be reached side by side and gives back how many they are. */
+function gather(layers: Layers, F: Float64Array, first: number, end: number): number {
+  const { task, half, room } = layers;
+  const { at, reached, x, perM } = room;
+  let count = 0;
+  for (let y = first; y < end; y += 1) {
+    const f = F[y]!;
+    if (f === Infinity) continue;
+    at[count] = y;
+    reached[count] = f + half.A[y]!;
+    x[count] = task.X[y]!;
+    perM[count] = half.B[y]!;
+    count += 1;
   }
   return count;
 }
@@ -204,7 +213,7 @@ function firstBeyond(X: Float64Array, low: number, x: number): number {
 function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array): boolean {
   const { task, G, K } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
-  const { back } = layers.room;
+  const { back, x } = layers.room;
   const n = X.length;
   const least = Math.max(limits.minSpacingM, limits.interiorLeast * G) - SLACK;
   const nearest =
@@ -216,22 +225,22 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
   const farthest = Math.min(j * G, X[lastEnd]! - limits.minSpacingM) + SLACK;
   const closes = X[firstEnd]! - G - SLACK;
   const onto: Onto = { from: -1, cost: Infinity };
-  const { reached } = layers.room;
   // Positions that j spans can reach move up with j: only these, and those a span before them, are looked at.
   const first = firstFrom(X, 1, nearest);
   const end = firstBeyond(X, first, farthest);
-  let low = firstFrom(X, 1, X[Math.min(first, n - 1)]! - G - SLACK);
-  for (let y = low; y < end; y += 1) reached[y] = F[y]! + layers.half.A[y]!;
-  next.fill(Infinity, low, end);
+  const before = firstFrom(X, 1, X[Math.min(first, n - 1)]! - G - SLACK);
+  const places = gather(layers, F, before, end);
+  next.fill(Infinity, before, end);
   let any = false;
-  let high = low - 1;
+  let low = 0;
+  let high = -1;
   for (let z = first; z < end; z += 1) {
     const xz = X[z]!;
-    while (X[low]! < xz - G - SLACK) low += 1;
-    while (X[high + 1]! <= xz - least) high += 1;
+    while (low < places && x[low]! < xz - G - SLACK) low += 1;
+    while (high + 1 < places && x[high + 1]! <= xz - least) high += 1;
     const count =
       j > 2 && xz < closes
-        ? cheapestOnto(layers, reached, low, high, z, onto)
+        ? cheapestOnto(layers, low, high, z, onto)
         : listOnto(layers, j, F, low, high, z, onto);
     if (count === 0 || isTooDear(layers, onto.cost, xz)) continue;
     if (xz >= closes) closeFrom(layers, z, count);
