@@ -14,6 +14,18 @@ function between(grid: readonly number[], value: number): readonly [index: numbe
   return [i, high > low ? Math.min(1, Math.max(0, (value - low) / (high - low))) : 0];
 }
 
+/** A span among the trial spans of a form, with what was last read there from the rows on both sides. */
+interface Place {
+  readonly spanM: number;
+  readonly row: TrialRows['row'];
+  readonly i: number;
+  readonly share: number;
+  readonly octaves: number;
+  low: number;
+  high: number;
+  value: number;
+}
+
 /** Cost tables of one site and one set of rates; each form and method is sized once. */
 export interface TableShelf {
   /** The table the search of one form uses: the form by its method and its approach form by the usual one. */
@@ -50,14 +62,31 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
       if (!rows) byForm.set(form, (rows = rowsFor(form === asked.form ? asked : usual(form))));
       return rows;
     };
+    // Asked span after span of one governing span, and of ends that are worth the same: the powers are taken once.
+    const places = new Map<FormId, Place>();
+    const placeOf = (form: FormId, spanM: number): Place => {
+      const known = places.get(form);
+      if (known?.spanM === spanM) return known;
+      const { spansM, row } = rowsBy(form);
+      const [i, share] = between(spansM, spanM);
+      const octaves =
+        share > 0 && share < 1 ? Math.log(spanM / spansM[i]!) / Math.log(spansM[i + 1]! / spansM[i]!) : 0;
+      const place = { spanM, share, octaves, row, i, low: NaN, high: NaN, value: NaN };
+      places.set(form, place);
+      return place;
+    };
     const read = (form: FormId, spanM: number, value: (row: TrialRow) => number): number => {
-      const rows = rowsBy(form);
-      const [i, share] = between(rows.spansM, spanM);
-      const low = share < 1 ? value(rows.row(i)) : 0;
-      const high = share > 0 ? value(rows.row(i + 1)) : 0;
+      const place = placeOf(form, spanM);
+      const { share, octaves, row, i } = place;
+      const low = share < 1 ? value(row(i)) : 0;
+      const high = share > 0 ? value(row(i + 1)) : 0;
       if (!(share > 0 && share < 1 && low > 0 && high > 0)) return (1 - share) * low + share * high;
-      const octaves = Math.log(spanM / rows.spansM[i]!) / Math.log(rows.spansM[i + 1]! / rows.spansM[i]!);
-      return low * Math.pow(high / low, octaves);
+      if (low !== place.low || high !== place.high) {
+        place.low = low;
+        place.high = high;
+        place.value = low * Math.pow(high / low, octaves);
+      }
+      return place.value;
     };
     let asking: { form?: FormId; mean: number; onLoads: ReturnType<typeof between> } = {
       mean: NaN,

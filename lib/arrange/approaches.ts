@@ -1,5 +1,5 @@
 import type { CostTable, FormId } from '../model/index.ts';
-import { spanFault, type Limits } from './limits.ts';
+import { spanFault, spansAlong, type Limits } from './limits.ts';
 import type { SupportCosts } from './curves.ts';
 import { searchUnit } from './unitSearch.ts';
 
@@ -46,8 +46,7 @@ export function approachesTo(
     if (same !== undefined ? cost >= same.cost : list.length === KEPT && cost >= list[KEPT - 1]!.cost)
       return true;
     const at = trace();
-    const lengths = at.slice(1).map((i, s) => X[i]! - X[at[s]!]!);
-    if (spanFault(lengths, limits) === null) insert(list, { cost, spans, at });
+    if (spanFault(spansAlong(X, at), limits) === null) insert(list, { cost, spans, at });
     return true;
   });
   return lists;

@@ -3,7 +3,7 @@ import type { Candidate } from './candidate.ts';
 import type { Counter } from './counter.ts';
 import { supportCosts } from './curves.ts';
 import type { Frame } from './frame.ts';
-import { limitsOf, spanFault, type Limits } from './limits.ts';
+import { limitsOf, spanFault, spansAlong, type Limits } from './limits.ts';
 import { KEPT, type ArrangeRequest } from './request.ts';
 import { fewestSpans, governingSpans, mostSpans } from './governingSpans.ts';
 import { searchUnit } from './unitSearch.ts';
@@ -61,10 +61,7 @@ export function continuousCandidates(
     const name = at.join();
     const known = found.get(name);
     if (known !== undefined && known.estimate <= estimate) return true;
-    const fault = spanFault(
-      at.slice(1).map((i, s) => frame.X[i]! - frame.X[at[s]!]!),
-      limits,
-    );
+    const fault = spanFault(spansAlong(frame.X, at), limits);
     if (fault === null) found.set(name, { placed: [{ form, role: 'main', at }], estimate });
     else dropped.add(fault);
     return found.size < enough;

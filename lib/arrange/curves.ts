@@ -119,11 +119,13 @@ export function halfCosts(costs: SupportCosts, fromM: number, toM: number): Half
   const shareLow = (fromM - knots[low]!) / (knots[low + 1]! - knots[low]!);
   const shareHigh = (toM - knots[high]!) / (knots[high + 1]! - knots[high]!);
   const width = Math.max(toM - fromM, 1e-6);
+  const [lowC, lowNextC, highC, highNextC] = [C[low]!, C[low + 1]!, C[high]!, C[high + 1]!];
   for (let i = 0; i < n; i += 1) {
-    const first = C[low]![i]! + shareLow * (C[low + 1]![i]! - C[low]![i]!);
-    const last = C[high]![i]! + shareHigh * (C[high + 1]![i]! - C[high]![i]!);
-    B[i] = (last - first) / width / 2;
-    A[i] = first / 2 - B[i]! * fromM;
+    const first = lowC[i]! + shareLow * (lowNextC[i]! - lowC[i]!);
+    const last = highC[i]! + shareHigh * (highNextC[i]! - highC[i]!);
+    const perM = (last - first) / width / 2;
+    B[i] = perM;
+    A[i] = first / 2 - perM * fromM;
   }
   return { A, B };
 }

@@ -44,9 +44,17 @@ export type Fault =
 
 /** What is wrong with the spans of one continuous unit, or null. */
 export function spanFault(spans: readonly number[], limits: Limits): Fault | null {
-  const longest = Math.max(...spans);
+  const last = spans.length - 1;
+  let longest = -Infinity;
+  let shortest = Infinity;
+  let interior = Infinity;
+  for (let s = 0; s <= last; s += 1) {
+    const span = spans[s]!;
+    longest = Math.max(longest, span);
+    shortest = Math.min(shortest, span);
+    if (s > 0 && s < last) interior = Math.min(interior, span);
+  }
   const slack = SLACK * longest + 1e-6;
-  const shortest = Math.min(...spans);
   if (spans.length > limits.mostSpans) return 'more spans than the form has';
   if (!(longest >= limits.minSpanM - slack && longest <= limits.maxSpanM + slack))
     return 'span outside the band of the form';
@@ -55,16 +63,18 @@ export function spanFault(spans: readonly number[], limits: Limits): Fault | nul
   if (spans.length === 2) {
     return shortest >= limits.endLeast * longest - slack ? null : 'end span outside its window';
   }
-  for (const [end, beside] of [
-    [spans[0]!, spans[1]!],
-    [spans.at(-1)!, spans.at(-2)!],
-  ] as const) {
-    if (!(end >= limits.endLeast * beside - slack && end <= limits.endMost * beside + slack)) {
-      return 'end span outside its window';
-    }
-  }
-  const interior = spans.slice(1, -1);
-  return Math.min(...interior) >= limits.interiorLeast * longest - slack
+  const isOutside = (end: number, beside: number): boolean =>
+    !(end >= limits.endLeast * beside - slack && end <= limits.endMost * beside + slack);
+  if (isOutside(spans[0]!, spans[1]!) || isOutside(spans[last]!, spans[last - 1]!))
+    return 'end span outside its window';
+  return interior >= limits.interiorLeast * longest - slack
     ? null
     : 'interior span too short for its neighbours';
+}
+
+/** Spans between rising positions, by their indices. */
+export function spansAlong(X: Float64Array, at: readonly number[]): number[] {
+  const spans: number[] = [];
+  for (let s = 1; s < at.length; s += 1) spans.push(X[at[s]!]! - X[at[s - 1]!]!);
+  return spans;
 }

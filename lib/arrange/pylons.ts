@@ -56,8 +56,9 @@ function sidesBeyond(
     const own = spanCostAt(row.side, span) + search.half(pylon, span) + pier;
     for (const approach of lists) {
       const cost = own + approach.cost;
-      const same = best.findIndex((side) => side.approach.spans === approach.spans);
-      if (same < 0) best.push({ end, cost, approach });
+      let same = 0;
+      while (same < best.length && best[same]!.approach.spans !== approach.spans) same += 1;
+      if (same === best.length) best.push({ end, cost, approach });
       else if (cost < best[same]!.cost * (1 - 1e-9)) best[same] = { end, cost, approach };
     }
   }

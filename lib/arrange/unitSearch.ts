@@ -1,6 +1,6 @@
 import type { CostTable } from '../model/index.ts';
 import { aloneWorksAs, endWorksAs, halfCosts, spanCostAt, spanCosts } from './curves.ts';
-import { governingSpans, isFull, MORE_SPANS, mostSpans } from './governingSpans.ts';
+import { fewestSpans, governingSpans, isFull, MORE_SPANS, mostSpans } from './governingSpans.ts';
 import { SLACK as sameShare } from './limits.ts';
 import { close, handOn, isTooDear, leastPerM, roomFor, type Layers } from './unitLayers.ts';
 import type { UnitTask } from './unitTask.ts';
@@ -310,7 +310,10 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
   const ends = task.lastEnd - task.firstEnd + 1;
   const F = new Float64Array(n);
   const next = new Float64Array(n);
-  const governing = governingSpans(task).map((G) => ({ G, K: mostSpans(task, G) }));
+  // The nearest end is too far for some with as many spans as are tried.
+  const governing = governingSpans(task)
+    .map((G) => ({ G, K: mostSpans(task, G) }))
+    .filter(({ G, K }) => K >= fewestSpans(task.limits, task.X[task.firstEnd]!, G));
   const room = roomFor(n, ends, Math.max(0, ...governing.map(({ K }) => K)));
   const worth = worthOf(ends === 1 ? (task.keep ?? Infinity) : Infinity);
   const cut = new Set<number>();
