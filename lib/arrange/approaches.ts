@@ -7,8 +7,8 @@ import { searchUnit } from './unitSearch.ts';
 export interface Approach {
   readonly cost: number;
   readonly spans: number;
-  /** Indices of its supports from the abutment to the main unit; empty when the main unit begins at the abutment. */
-  readonly at: readonly number[];
+  /** Indices of its supports from the abutment to the main unit; none when the main unit begins at the abutment. */
+  readonly at: () => readonly number[];
 }
 
 /** Different numbers of spans kept for each end of an approach. */
@@ -36,17 +36,18 @@ export function approachesTo(
   table: CostTable,
 ): Approach[][] {
   const lists: Approach[][] = Array.from({ length: X.length }, () => []);
-  if (firstEnd === 0) lists[0]!.push({ cost: 0, spans: 0, at: [] });
+  if (firstEnd === 0) lists[0]!.push({ cost: 0, spans: 0, at: () => [] });
   const first = Math.max(firstEnd, 1);
   if (lastEnd < first) return lists;
   const task = { form, X, firstEnd: first, lastEnd, limits, supports, endIsPier: true };
-  searchUnit(task, table, (end, spans, _, cost, trace) => {
+  searchUnit(task, table, (end, spans, governingM, cost, at) => {
     const list = lists[end]!;
     const same = list.find((known) => known.spans === spans);
     if (same !== undefined ? cost >= same.cost : list.length === KEPT && cost >= list[KEPT - 1]!.cost)
       return true;
-    const at = trace();
-    if (spanFault(spansAlong(X, at), limits) === null) insert(list, { cost, spans, at });
+    // The search keeps every window but the least longest span, which an inner span may reach by itself.
+    const reaches = spans > 2 && limits.interiorLeast * governingM >= limits.minSpanM;
+    if (reaches || spanFault(spansAlong(X, at()), limits) === null) insert(list, { cost, spans, at });
     return true;
   });
   return lists;

@@ -70,8 +70,9 @@ function approachesFromEnd(
   const n = X.length;
   const lengthM = X[n - 1]!;
   const turned = Float64Array.from(X, (_, i) => lengthM - X[n - 1 - i]!);
+  const turnedBack = (at: readonly number[]): number[] => at.map((i) => n - 1 - i).reverse();
   const lists = approachesTo(form, turned, n - 1 - last, n - 1 - first, limits, backwards(supports), table);
-  return lists.reverse().map((list) => list.map((a) => ({ ...a, at: a.at.map((i) => n - 1 - i).reverse() })));
+  return lists.reverse().map((list) => list.map(({ at, ...rest }) => ({ ...rest, at: () => turnedBack(at()) })));
 }
 
 /** How far a main unit may reach beyond its main span, as a share of that. */
@@ -179,9 +180,9 @@ export function mainUnitCandidates(
   const found: Candidate[] = [];
   for (const { at, pylons, before, after, cost } of best.values()) {
     const placed: PlacedUnit[] = [];
-    if (before.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: before.at });
+    if (before.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: before.at() });
     placed.push(sides?.hung === true ? { form, role: 'main', at, pylons } : { form, role: 'main', at });
-    if (after.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: after.at });
+    if (after.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: after.at() });
     found.push({ placed, estimate: cost });
   }
   return found;

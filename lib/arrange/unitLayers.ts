@@ -4,8 +4,6 @@ import type { UnitTask } from './unitTask.ts';
 
 /** Working room of one search, reused for every governing span. */
 interface Room {
-  /** Predecessor of each position by the number of spans used to reach it, most spans x n. */
-  readonly back: Int32Array;
   /** Best closed layouts of the last layer by end: cost, last and last but one support. */
   readonly closed: Float64Array;
   readonly closedZ: Int32Array;
@@ -22,9 +20,8 @@ interface Room {
   readonly perM: Float64Array;
 }
 
-export function roomFor(n: number, ends: number, most: number): Room {
+export function roomFor(n: number, ends: number): Room {
   return {
-    back: new Int32Array(most * n),
     closed: new Float64Array(ends).fill(Infinity),
     closedZ: new Int32Array(ends),
     closedY: new Int32Array(ends),
@@ -39,6 +36,15 @@ export function roomFor(n: number, ends: number, most: number): Room {
   };
 }
 
+/** Where the last span onto each position from `first` on begins, in one layer. */
+export interface Steps {
+  readonly first: number;
+  readonly from: Int32Array;
+}
+
+/** Takes a closed layout: its end, spans, cost, last support before the end and the one before that. */
+export type Closed = (end: number, spans: number, cost: number, z: number, y: number) => boolean;
+
 export interface Layers {
   readonly task: UnitTask;
   readonly G: number;
@@ -49,6 +55,8 @@ export interface Layers {
   readonly aloneCost: SpanCosts;
   readonly half: HalfCosts;
   readonly room: Room;
+  /** By the number of spans of a layer. */
+  readonly back: Steps[];
   /** A layout dearer than this need not be followed, and what the rest of it costs at least for each metre. */
   readonly boundCost: number;
   readonly restPerM: number;
@@ -106,16 +114,12 @@ export function close(layers: Layers, end: number, cost: number, z: number, y: n
 }
 
 /** Hands on the closed layouts of the last layer by rising end and forgets them; false where no more are wanted. */
-export function handOn(
-  layers: Layers,
-  spans: number,
-  take: (end: number, spans: number, cost: number) => boolean,
-): boolean {
+export function handOn(layers: Layers, spans: number, take: Closed): boolean {
   const { task, room, closedFrom, closedTo } = layers;
-  const { closed } = room;
+  const { closed, closedZ, closedY } = room;
   let more = true;
   for (let at = closedFrom; at <= closedTo && more; at += 1)
-    if (closed[at]! < Infinity) more = take(task.firstEnd + at, spans, closed[at]!);
+    if (closed[at]! < Infinity) more = take(task.firstEnd + at, spans, closed[at]!, closedZ[at]!, closedY[at]!);
   closed.fill(Infinity, closedFrom, closedTo + 1);
   layers.closedFrom = closed.length;
   layers.closedTo = -1;

@@ -2,7 +2,7 @@ import type { CostTable } from '../model/index.ts';
 import { aloneWorksAs, endWorksAs, halfCosts, spanCostAt, spanCosts } from './curves.ts';
 import { fewestSpans, governingSpans, isFull, MORE_SPANS, mostSpans } from './governingSpans.ts';
 import { SLACK as sameShare } from './limits.ts';
-import { close, handOn, isTooDear, leastPerM, roomFor, type Layers } from './unitLayers.ts';
+import { close, handOn, isTooDear, leastPerM, roomFor, type Closed, type Layers, type Steps } from './unitLayers.ts';
 import type { UnitTask } from './unitTask.ts';
 import { worthOf } from './worth.ts';
 
@@ -10,8 +10,8 @@ import { worthOf } from './worth.ts';
 const SLACK = sameShare;
 
 /**
- * Called for every end, number of spans and governing span that can be laid out; `trace()` gives the indices into `X`
- * while the call lasts. Giving back false ends the search.
+ * Called for every end, number of spans and governing span that can be laid out; `trace()` gives the indices into `X`,
+ * at any time. Giving back false ends the search.
  */
 export type Visit = (
   end: number,
@@ -213,7 +213,7 @@ function firstBeyond(X: Float64Array, low: number, x: number): number {
 function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array): boolean {
   const { task, G, K } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
-  const { back, x } = layers.room;
+  const { x } = layers.room;
   const n = X.length;
   const least = Math.max(limits.minSpacingM, limits.interiorLeast * G) - SLACK;
   const nearest =
@@ -231,6 +231,8 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
   const before = firstFrom(X, 1, X[Math.min(first, n - 1)]! - G - SLACK);
   const places = gather(layers, F, before, end);
   next.fill(Infinity, before, end);
+  const from = new Int32Array(end - first);
+  layers.back[j] = { first, from };
   let any = false;
   let low = 0;
   let high = -1;
@@ -246,22 +248,20 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
     if (xz >= closes) closeFrom(layers, z, count);
     any = true;
     next[z] = onto.cost;
-    back[j * n + z] = onto.from;
+    from[z - first] = onto.from;
   }
   return any;
 }
 
-/** Indices of the supports of the cheapest layout of k spans to an end, while its layer is the last one made. */
-function traceOf({ task, room }: Layers, k: number, end: number): number[] {
-  const { back, closedZ, closedY } = room;
-  const n = task.X.length;
+/** Indices of the supports of the cheapest layout of k spans to an end, whose last spans begin on y and z. */
+function traceOf(back: readonly Steps[], k: number, end: number, z: number, y: number): number[] {
   const at = new Array<number>(k + 1);
   at[k] = end;
-  if (k >= 2) at[k - 1] = closedZ[end - task.firstEnd]!;
-  let y = closedY[end - task.firstEnd]!;
+  if (k >= 2) at[k - 1] = z;
+  let i = y;
   for (let j = k - 2; j >= 1; j -= 1) {
-    at[j] = y;
-    y = j > 1 ? back[j * n + y]! : 0;
+    at[j] = i;
+    if (j > 1) i = back[j]!.from[i - back[j]!.first]!;
   }
   at[0] = 0;
   return at;
@@ -281,7 +281,7 @@ function layLayers(
   layers: Layers,
   F: Float64Array,
   next: Float64Array,
-  closed: (end: number, spans: number, cost: number) => boolean,
+  closed: Closed,
 ): boolean {
   const { K } = layers;
   firstSpan(layers, F);
@@ -314,7 +314,7 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
   const governing = governingSpans(task)
     .map((G) => ({ G, K: mostSpans(task, G) }))
     .filter(({ G, K }) => K >= fewestSpans(task.limits, task.X[task.firstEnd]!, G));
-  const room = roomFor(n, ends, Math.max(0, ...governing.map(({ K }) => K)));
+  const room = roomFor(n, ends);
   const worth = worthOf(ends === 1 ? (task.keep ?? Infinity) : Infinity);
   const cut = new Set<number>();
   for (const { G, K } of spreadFirst(governing)) {
@@ -341,15 +341,17 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
       aloneCost,
       half,
       room,
+      back: [],
       boundCost,
       restPerM,
       cut: false,
       closedFrom: ends,
       closedTo: -1,
     };
-    const more = layLayers(layers, F, next, (end, spans, own) => {
+    const more = layLayers(layers, F, next, (end, spans, own, z, y) => {
       worth.add(spans, own + fixed);
-      return visit(end, spans, G, own + fixed, () => traceOf(layers, spans, end));
+      const { back } = layers;
+      return visit(end, spans, G, own + fixed, () => traceOf(back, spans, end, z, y));
     });
     if (layers.cut) cut.add(G);
     if (!more) break;
