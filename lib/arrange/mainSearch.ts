@@ -1,6 +1,7 @@
 import type { CostTable } from '../model/index.ts';
 import type { Approach } from './approaches.ts';
 import type { Limits } from './limits.ts';
+import type { SideRoom } from './sideRoom.ts';
 import type { ArrangeRequest } from './request.ts';
 
 /** What the layouts of a main unit are made from. */
@@ -23,6 +24,7 @@ export interface MainSearch {
   /** Approaches from either abutment to each index. */
   readonly toLeft: readonly (readonly Approach[])[];
   readonly toRight: readonly (readonly Approach[])[];
+  readonly room: SideRoom;
   /** Deck, fixed cost and supports of a main unit alone and its main span, m; null where it may not stand so. */
   readonly ownCost: (
     at: readonly number[],

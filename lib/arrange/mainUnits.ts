@@ -9,6 +9,7 @@ import type { MainLayout, MainSearch } from './mainSearch.ts';
 import { pylonCost, pylonLayouts, sidesOf, spanRows } from './pylons.ts';
 import { refine } from './refine.ts';
 import type { ArrangeRequest } from './request.ts';
+import { sideRoom } from './sideRoom.ts';
 import { simpleCost, simpleLayouts } from './simpleMain.ts';
 
 /** Without a barred stretch and above this many positions the main span goes over the middle of the crossing. */
@@ -18,9 +19,6 @@ const PLACES = 64;
 
 /** The cheapest is kept for each class of main span: whole metres, or this share of a longer crossing. */
 const MAIN_CLASSES = 400;
-
-/** More than any number of spans or metres of main span: keeps the parts of a key apart. */
-const MOST_SPANS = 2 ** 15;
 
 /** Steps between places tried among the indices first..last. */
 const strideOf = (first: number, last: number): number => Math.max(1, Math.ceil((last - first + 1) / PLACES));
@@ -72,7 +70,9 @@ function approachesFromEnd(
   const turned = Float64Array.from(X, (_, i) => lengthM - X[n - 1 - i]!);
   const turnedBack = (at: readonly number[]): number[] => at.map((i) => n - 1 - i).reverse();
   const lists = approachesTo(form, turned, n - 1 - last, n - 1 - first, limits, backwards(supports), table);
-  return lists.reverse().map((list) => list.map(({ at, ...rest }) => ({ ...rest, at: () => turnedBack(at()) })));
+  return lists
+    .reverse()
+    .map((list) => list.map(({ cost, spans, at }) => ({ cost, spans, at: () => turnedBack(at()) })));
 }
 
 /** How far a main unit may reach beyond its main span, as a share of that. */
@@ -138,8 +138,9 @@ export function mainUnitCandidates(
   const supports = supportCosts(table, pattern.approach, frame, least, approachMost);
   const best = new Map<number, MainLayout>();
   const classM = Math.max(1, frame.lengthM / MAIN_CLASSES);
+  // Fewer spans than positions and no more classes than whole metres up to the most: small keys are looked up fast.
   const keyOf = (pylons: number, spans: number, mainM: number): number =>
-    (pylons * MOST_SPANS + spans) * MOST_SPANS + Math.round(mainM / classM);
+    (pylons * X.length + spans) * (MAIN_CLASSES + 1) + Math.round(mainM / classM);
   const rowOf = spanRows({ request, table });
   const sides = sidesOf(pattern);
   const search: MainSearch = {
@@ -156,6 +157,7 @@ export function mainUnitCandidates(
     outerRight: places(X, ...ranges.outerRight),
     toLeft: approachesTo(pattern.approach, X, ...ranges.outerLeft, approachLimits, supports, table),
     toRight: approachesFromEnd(pattern.approach, X, ...ranges.outerRight, approachLimits, supports, table),
+    room: sideRoom(X.length),
     ownCost: (at, pylons) =>
       sides ? pylonCost(search, sides, rowOf, at, pylons) : simpleCost(search, at[0]!, at[1]!),
     wants(pylons, spans, mainM, cost) {

@@ -43,7 +43,8 @@ function sidesBeyond(
   const last = X.length - 1;
   const least = window[0] * mainM - SLACK;
   const most = Math.min(window[1], 1) * mainM + SLACK;
-  const best: Side[] = [];
+  const { spans, costs, ends: at, approaches: beyond } = search.room;
+  let count = 0;
   const from = toLeft ? X[pylon]! - most : X[pylon]! + least;
   const to = toLeft ? X[pylon]! - least : X[pylon]! + most;
   for (let e = firstFrom(X, ends, from); e < ends.length; e += 1) {
@@ -57,13 +58,18 @@ function sidesBeyond(
     for (const approach of lists) {
       const cost = own + approach.cost;
       let same = 0;
-      while (same < best.length && best[same]!.approach.spans !== approach.spans) same += 1;
-      if (same === best.length) best.push({ end, cost, approach });
-      else if (cost < best[same]!.cost * (1 - 1e-9)) best[same] = { end, cost, approach };
+      while (same < count && spans[same] !== approach.spans) same += 1;
+      if (same < count && !(cost < costs[same]! * (1 - 1e-9))) continue;
+      spans[same] = approach.spans;
+      costs[same] = cost;
+      at[same] = end;
+      beyond[same] = approach;
+      if (same === count) count += 1;
     }
   }
-  best.sort((a, b) => a.cost - b.cost || a.approach.spans - b.approach.spans);
-  return best.slice(0, KEPT);
+  const best = Array.from({ length: count }, (_, i) => i);
+  best.sort((a, b) => costs[a]! - costs[b]! || spans[a]! - spans[b]!);
+  return best.slice(0, KEPT).map((i) => ({ end: at[i]!, cost: costs[i]!, approach: beyond[i]! }));
 }
 
 interface Main {

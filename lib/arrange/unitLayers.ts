@@ -119,7 +119,8 @@ export function handOn(layers: Layers, spans: number, take: Closed): boolean {
   const { closed, closedZ, closedY } = room;
   let more = true;
   for (let at = closedFrom; at <= closedTo && more; at += 1)
-    if (closed[at]! < Infinity) more = take(task.firstEnd + at, spans, closed[at]!, closedZ[at]!, closedY[at]!);
+    if (closed[at]! < Infinity)
+      more = take(task.firstEnd + at, spans, closed[at]!, closedZ[at]!, closedY[at]!);
   closed.fill(Infinity, closedFrom, closedTo + 1);
   layers.closedFrom = closed.length;
   layers.closedTo = -1;

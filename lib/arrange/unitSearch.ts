@@ -2,7 +2,16 @@ import type { CostTable } from '../model/index.ts';
 import { aloneWorksAs, endWorksAs, halfCosts, spanCostAt, spanCosts } from './curves.ts';
 import { fewestSpans, governingSpans, isFull, MORE_SPANS, mostSpans } from './governingSpans.ts';
 import { SLACK as sameShare } from './limits.ts';
-import { close, handOn, isTooDear, leastPerM, roomFor, type Closed, type Layers, type Steps } from './unitLayers.ts';
+import {
+  close,
+  handOn,
+  isTooDear,
+  leastPerM,
+  roomFor,
+  type Closed,
+  type Layers,
+  type Steps,
+} from './unitLayers.ts';
 import type { UnitTask } from './unitTask.ts';
 import { worthOf } from './worth.ts';
 
@@ -277,12 +286,7 @@ function spreadFirst<T>(list: readonly T[]): T[] {
  * Lays out one governing span, one layer of spans on the other, and hands on what each layer closes. False where
  * `closed` wants no more.
  */
-function layLayers(
-  layers: Layers,
-  F: Float64Array,
-  next: Float64Array,
-  closed: Closed,
-): boolean {
+function layLayers(layers: Layers, F: Float64Array, next: Float64Array, closed: Closed): boolean {
   const { K } = layers;
   firstSpan(layers, F);
   if (!handOn(layers, 1, closed)) return false;
