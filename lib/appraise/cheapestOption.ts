@@ -35,7 +35,7 @@ const isBetter = (one: DepthTrial, than: DepthTrial): boolean =>
 function depthsToTry(bench: Workbench, option: Option, main: Unit): readonly [least: number, most: number] {
   const spans = spansOf(main);
   const { variant = {} } = option;
-  const [least, most] = depthRange(main.form, option.method, spans, bench.site.deck, variant);
+  const [least, most] = depthRange(main.form, option.method, spans, bench.site, variant);
   if (variant.substringers) return [least, most];
   const deckAlone = bench.tables.tableFor(option).depthM(main.form, Math.max(...spans));
   return [least, Math.max(least, Math.min(most, OVER_DECK_ALONE * deckAlone))];

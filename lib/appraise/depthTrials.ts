@@ -18,7 +18,7 @@ export function depthTrials(study: Study, worked: AppraisedOption): readonly Opt
   const { number, form, method, units, designs, variant = {} } = worked;
   const main = mainUnit(units);
   const ownM = designs[units.indexOf(main)]!.task.depthM;
-  const [least, most] = depthRange(form, method, spansOf(main), survey(study.brief).deck, variant);
+  const [least, most] = depthRange(form, method, spansOf(main), survey(study.brief), variant);
   const depths = new Set([ownM]);
   for (let k = -EACH_SIDE; k <= EACH_SIDE; k++) {
     const depthM = Math.round(ownM * STRIDE ** k * STEPS) / STEPS;

@@ -131,7 +131,7 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
 
   const made = function* (index: number): Work<TrialRow> {
     const spanM = spansM[index]!;
-    const range = depthRange(form, method, trialUnit(form, spanM, 1).spansM, site.deck);
+    const range = depthRange(form, method, trialUnit(form, spanM, 1).spansM, site);
     // The best depth is nearly the same share of the band for one span as for the one before it.
     const before = index > 0 ? yield* make(index - 1) : undefined;
     const look = before && (before.depthM * range[1]) / before.mostDepthM;

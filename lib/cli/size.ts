@@ -233,10 +233,10 @@ function taskAt({ task, haunch }: Asked, midspanM: number): UnitTask {
 
 /** The shallowest depth, m, within 1 % of the least cost of the deck at the mean rates that come with the tool. */
 function depthSought(asked: Asked): number {
-  const { form, method, spansM, deck } = asked.task;
+  const { form, method, spansM } = asked.task;
   const mean = meanRates(ratesFor({ ratePack: 'demo-2026', rates: [] }));
   return finish(
-    leastCostDepth(depthRange(form, method, spansM, deck), (trialM) => {
+    leastCostDepth(depthRange(form, method, spansM, asked.task), (trialM) => {
       const { lines, limitingCheck } = formModule(form).size(taskAt(asked, trialM));
       const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
       return { cost, utilisation: limitingCheck.utilisation };

@@ -111,7 +111,7 @@ export const designFigures: readonly Descriptor[] = [
     method: 'least cost',
     formula: (at) =>
       isMain(at)
-        ? 'shallowest depth, in steps of 50 mm, within 1 % of the least cost of the crossing inside the published band; checks and headroom hold where they can'
+        ? 'shallowest depth, in steps of 50 mm, within 1 % of the least cost of the crossing inside the published band, or the least that can be made where that is deeper; checks and headroom hold where they can'
         : 'read off the cost table at the longest span, to 50 mm',
     inputs: (at) => {
       const { task } = at.design;

@@ -38,6 +38,11 @@ export interface FormModule {
    */
   variants?(spansM: readonly number[], deck: DeckSpec, method: MethodId): readonly Variant[];
   /**
+   * Least structural depth, m, that practical parts leave whatever the span, where a short span needs more than its
+   * published ratio; absent where the published bands hold down to the shortest span.
+   */
+  leastDepthM?(task: Pick<UnitTask, 'standard' | 'deck'>): number;
+  /**
    * Sizes one unit. Always returns a design; where a limit cannot be met within practical plates, strands or bars the
    * offending check has a utilisation above 1 and a warning says so (the option-stage rule then puts the option out).
    */

@@ -16,7 +16,9 @@ export interface GirderLayout {
  * substringers stand between them; `task.girders` overrides.
  * @throws RangeError when fewer than two girders or part of a girder are asked for, or substringers between two.
  */
-export function girderLayout(task: UnitTask): GirderLayout {
+export function girderLayout(
+  task: Pick<UnitTask, 'deck'> & Partial<Pick<UnitTask, 'girders' | 'substringers'>>,
+): GirderLayout {
   const { widthM } = task.deck;
   const { twin, multi } = compositeData;
   const asked = task.girders;

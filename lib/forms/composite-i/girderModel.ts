@@ -103,6 +103,34 @@ export interface Carrying {
   readonly trafficOn: (slab: SlabDesign, girderM: number, modularRatio: number) => TrafficLoad;
 }
 
+/** The slab across girders of any layout. */
+function slabOn(
+  { standard, deck, substringers }: Pick<UnitTask, 'standard' | 'deck' | 'substringers'>,
+  { spacingM, overhangM }: GirderLayout,
+  stiff: boolean,
+  even: boolean,
+): SlabDesign {
+  return designSlab({
+    standard,
+    deck,
+    direction: 'across',
+    spacingM: substringers ? spacingM / 2 : spacingM,
+    overhangM,
+    continuous: stiff,
+    uniform: even,
+  });
+}
+
+/**
+ * Least structural depth, m, of plain girders under a deck: the slab over them and the least height of a plate girder.
+ * Below spans of about 15 m that is more than published ratios of depth to span allow.
+ */
+export function leastDepthM(task: Pick<UnitTask, 'standard' | 'deck'>): number {
+  const layout = girderLayout(task);
+  const { rootM } = slabOn(task, layout, !layout.twin, !layout.twin);
+  return compositeData.leastGirderM.value + rootM;
+}
+
 /** A girder of any layout: its slab designed across the deck and the loads shared out. `curve` multiplies every load. */
 export function modelOn(
   task: UnitTask,
@@ -111,15 +139,7 @@ export function modelOn(
   { stiff, even, trafficOn }: Carrying,
 ): GirderModel {
   const standard = loadStandard(task.standard);
-  const slab = designSlab({
-    standard: task.standard,
-    deck: task.deck,
-    direction: 'across',
-    spacingM: task.substringers ? layout.spacingM / 2 : layout.spacingM,
-    overhangM: layout.overhangM,
-    continuous: stiff,
-    uniform: even,
-  });
+  const slab = slabOn(task, layout, stiff, even);
   const supportsM = supportPositions(task.spansM);
   const elementM = Float64Array.from(
     { length: task.spansM.length * elementsPerSpan },

@@ -7,7 +7,7 @@ import { girderChecks, heaviestPiece } from './girderChecks.ts';
 import { girderDepthAlong, girderElevation, girderSections } from './girderDrawing.ts';
 import { girderFiguresOf, ownWeightShare } from './girderReport.ts';
 import { girderLines } from './girderLines.ts';
-import { girderModel } from './girderModel.ts';
+import { girderModel, leastDepthM } from './girderModel.ts';
 import { girderVariants } from './girderVariants.ts';
 import { girderReactions } from './girderReactions.ts';
 import { sizeGirder } from './sizeGirder.ts';
@@ -28,6 +28,7 @@ export const compositeI: FormModule = {
   ignoresHeight: true,
   choices: ['haunchRatio', 'substringers'],
   variants: girderVariants,
+  leastDepthM,
   size,
 };
 
