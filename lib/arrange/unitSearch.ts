@@ -194,25 +194,13 @@ function gather(layers: Layers, F: Float64Array, first: number, end: number): nu
   return count;
 }
 
-/** First index from `low` on whose position is `x` or beyond. */
-function firstFrom(X: Float64Array, low: number, x: number): number {
+/** First index but 0 whose position is `x` or beyond. */
+function firstFrom(X: Float64Array, x: number): number {
   let high = X.length;
-  let from = low;
+  let from = 1;
   while (from < high) {
     const middle = (from + high) >> 1;
     if (X[middle]! < x) from = middle + 1;
-    else high = middle;
-  }
-  return from;
-}
-
-/** First index from `low` on whose position is beyond `x`. */
-function firstBeyond(X: Float64Array, low: number, x: number): number {
-  let high = X.length;
-  let from = low;
-  while (from < high) {
-    const middle = (from + high) >> 1;
-    if (X[middle]! <= x) from = middle + 1;
     else high = middle;
   }
   return from;
@@ -235,9 +223,10 @@ function oneMore(layers: Layers, j: number, F: Float64Array, next: Float64Array)
   const closes = X[firstEnd]! - G - SLACK;
   const onto: Onto = { from: -1, cost: Infinity };
   // Positions that j spans can reach move up with j: only these, and those a span before them, are looked at.
-  const first = firstFrom(X, 1, nearest);
-  const end = firstBeyond(X, first, farthest);
-  const before = firstFrom(X, 1, X[Math.min(first, n - 1)]! - G - SLACK);
+  const first = firstFrom(X, nearest);
+  let end = first;
+  while (end < n && X[end]! <= farthest) end += 1;
+  const before = firstFrom(X, X[Math.min(first, n - 1)]! - G - SLACK);
   const places = gather(layers, F, before, end);
   next.fill(Infinity, before, end);
   const from = new Int32Array(end - first);

@@ -13,11 +13,11 @@ const truss = { form: 'truss', method: formModule('truss').methods[0] } as const
 
 /** A composite approach of these spans at the depth that the cost table of a truss reads for it. */
 function approach(spansM: readonly number[]): Design {
-  const { size, methods } = formModule('composite-i');
+  const girders = formModule('composite-i');
   const depthM = Math.round(tables.tableFor(truss).depthM('composite-i', Math.max(...spansM)) * 20) / 20;
-  return size({
+  return girders.size({
     form: 'composite-i',
-    method: methods[0],
+    method: girders.methods[0],
     spansM,
     deck: site.deck,
     standard: site.standard,
@@ -46,7 +46,7 @@ describe('short composite spans beside a main unit', () => {
   it('depthRange(12 m) is the one depth of the slab and the least girder, deeper than the published ratio', () => {
     const [least, most] = depthRange('composite-i', 'crane', [12], site);
     const { figures } = approach([12]);
-    const slabM = figures!['slabAtGirderM']!;
+    const slabM = figures['slabAtGirderM']!;
     expect(least).toBeCloseTo(slabM + compositeData.leastGirderM.value, 9);
     expect(most).toBe(least);
     expect(most / 12).toBeGreaterThan(depthBand('composite-i', 'simple', 'crane')[1]);
