@@ -30,6 +30,22 @@ const SLACK_PX = 3;
 /** A drag that rests for this long lets slow work go on, ms. */
 const REST_MS = 120;
 
+/** A timer as late as this was kept by a busy page, ms. */
+const LATE_MS = 40;
+
+/**
+ * Runs a job once a drag has rested. Where the page was too busy to run it in time the hand has had no chance to move on:
+ * it is given one more rest. Gives back what calls it off.
+ */
+function onceRested(job: () => void): () => void {
+  const due = performance.now() + REST_MS;
+  let timer = setTimeout(() => {
+    if (performance.now() - due < LATE_MS) job();
+    else timer = setTimeout(job, REST_MS);
+  }, REST_MS);
+  return () => clearTimeout(timer);
+}
+
 /** Whether something is being dragged: what is not seen then waits. */
 export const isDragging = (): boolean => document.documentElement.classList.contains('dragging');
 
@@ -40,20 +56,20 @@ export const isDragging = (): boolean => document.documentElement.classList.cont
 export function untilDragRests(signal: AbortSignal): Promise<void> {
   if (!isDragging()) return Promise.resolve();
   return new Promise((resolve) => {
-    const timer = setTimeout(resolve, REST_MS);
-    signal.addEventListener('abort', () => clearTimeout(timer));
+    signal.addEventListener('abort', onceRested(resolve));
     document.addEventListener('pointerup', () => resolve(), { once: true, signal });
   });
 }
 
 type Told = (isMoving: boolean) => void;
 const told = new Set<Told>();
-let resting: ReturnType<typeof setTimeout> | undefined;
+/** Calls off what comes with the rest; none while nothing moves. */
+let callOff: (() => void) | undefined;
 
 function moving(isMoving: boolean): void {
-  const was = resting !== undefined;
-  clearTimeout(resting);
-  resting = isMoving ? setTimeout(() => moving(false), REST_MS) : undefined;
+  const was = callOff !== undefined;
+  callOff?.();
+  callOff = isMoving ? onceRested(() => moving(false)) : undefined;
   if (was !== isMoving) for (const tell of told) tell(isMoving);
 }
 
