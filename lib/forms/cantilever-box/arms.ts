@@ -9,35 +9,34 @@ export interface Arm {
   /** -1 to the left, 1 to the right. */
   readonly side: -1 | 1;
   readonly pierM: number;
-  /** Length over which the depth falls to that of midspan, m. */
-  readonly haunchM: number;
-  /** Length that is cantilevered: the same on both sides of a pier, m. */
+  /** Length that is cantilevered, over which the depth falls to that of midspan, m. */
   readonly armM: number;
+  /** Length of it that the other arm of the pier balances, m. */
+  readonly balancedM: number;
 }
 
 /**
- * Arms of all inner piers, left arm first. Haunches meet in the middle of inner spans; in an end span they reach as far
- * as in the span beyond the pier and leave at least the piece over the abutment. Where the two sides of a pier differ the
- * shorter one is cantilevered on both, so that the pier stays balanced. None in a single span.
+ * Arms of all inner piers, left arm first. They meet in the middle of inner spans; in an end span they reach as far as in
+ * the span beyond the pier and leave at least the piece over the abutment. Where the two sides of a pier differ the longer
+ * one goes on when the span of the shorter one is joined and holds it down. None in a single span.
  */
 export function armsOf(spansM: readonly number[]): Arm[] {
   const last = spansM.length - 1;
   const supportsM = supportPositions(spansM);
   const { leastOverSpan } = cantileverData.endOnFalsework;
+  const isEnd = (span: number): boolean => span === 0 || span === last;
   const reach = (span: number): number =>
-    span > 0 && span < last ? spansM[span]! / 2 : (1 - leastOverSpan) * spansM[span]!;
+    isEnd(span) ? (1 - leastOverSpan) * spansM[span]! : spansM[span]! / 2;
   const arms: Arm[] = [];
   for (let support = 1; support <= last; support++) {
     const left = support - 1;
-    const isEnd = (span: number): boolean => span === 0 || span === last;
-    const haunch = (span: number, other: number): number =>
+    const length = (span: number, other: number): number =>
       isEnd(span) ? Math.min(reach(span), reach(other)) : reach(span);
-    const haunches = [haunch(left, support), haunch(support, left)] as const;
-    const armM = Math.min(...haunches);
-    const pierM = supportsM[support]!;
+    const both = [length(left, support), length(support, left)] as const;
+    const at = { support, pierM: supportsM[support]!, balancedM: Math.min(...both) };
     arms.push(
-      { support, span: left, side: -1, pierM, haunchM: haunches[0], armM },
-      { support, span: support, side: 1, pierM, haunchM: haunches[1], armM },
+      { ...at, span: left, side: -1, armM: both[0] },
+      { ...at, span: support, side: 1, armM: both[1] },
     );
   }
   return arms;

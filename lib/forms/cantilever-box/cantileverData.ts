@@ -25,6 +25,7 @@ const schema = z.object({
   travellers: z.object({ mostPairs: number, setupsPerPair: number, setupsPerMove: number, source }),
   creep: z.object({ factor: number, source }),
   imbalance: z.object({ ownShare: number, source }),
+  holdDown: z.object({ overturning: number, holding: number, traveller: number, source }),
   topTendons: z.object({ ...ducts, overSegments: number }),
   bottomTendons: z.object({ ...ducts, anchorM: number, mostPerWeb: number }),
   stageTensionMPa: cited,

@@ -8,6 +8,7 @@ import { boxData } from '../concrete-box/boxData.ts';
 import { boxLayout, webSlope, type BoxLayout } from '../concrete-box/boxLayout.ts';
 import { roundUp } from '../concrete-box/boxModel.ts';
 import type { BoxTraffic } from '../concrete-box/boxTraffic.ts';
+import type { Anchor } from './anchors.ts';
 import { armsOf, type Arm } from './arms.ts';
 import { cantileverData } from './cantileverData.ts';
 import { haunchShare, pierDepths, placeAt } from './haunch.ts';
@@ -46,8 +47,11 @@ export interface CantileverModel extends CantileverBase {
   readonly way: Float64Array;
   readonly depthM: Float64Array;
   readonly overSupports: OverSupports;
+  /** What holds longer arms down, in the order in which it is called upon. */
+  readonly anchors: readonly Anchor[];
   /** Stations of each inner pier from the tips of its arms inwards, with their distance from it, m. */
   readonly towardsPiers: ReadonlyMap<number, readonly { readonly i: number; readonly away: number }[]>;
+  /** What is laid on the joined deck: not the ballast that holds an arm down, which is there before. */
   readonly superimposed: Effects;
   readonly traffic: BoxTraffic;
   /** Parasitic moment of 1 / depth as curvature that sags the deck, on stiffness 1, kNm per kNm2. */
@@ -61,7 +65,7 @@ export function cantileverBase(task: UnitTask): CantileverBase {
   const supportsM = supportPositions(spansM);
   const arms = armsOf(spansM);
   const governingM =
-    arms.length > 0 ? 2 * Math.max(...arms.map(({ haunchM }) => haunchM)) : Math.max(...spansM);
+    arms.length > 0 ? 2 * Math.max(...arms.map(({ armM }) => armM)) : Math.max(...spansM);
   const layout = boxLayout(
     task,
     Math.max(task.depthM, depthBand('cantilever-box', 'continuous')[1] * governingM),
@@ -98,7 +102,7 @@ export function cantileverModel(
   const { task, arms, supportsM, layout } = base;
   const { mostM, mostOverDepth } = cantileverData.bottomSlab;
   const depthsM = pierDepths(arms, task.depthM, pierDepthM);
-  const { beam, stiffness, traffic, overSupports } = stiffDeck(base, pierDepthM / task.depthM, power);
+  const { beam, stiffness, traffic, overSupports, anchors } = stiffDeck(base, pierDepthM / task.depthM, power);
   const n = beam.xM.length;
   const armAt = new Int16Array(n);
   const way = new Float64Array(n);
@@ -121,8 +125,9 @@ export function cantileverModel(
     way,
     depthM,
     overSupports,
+    anchors,
     towardsPiers: towardsPiers(arms, armAt, beam),
-    superimposed: uniform(beam, laidKNm(task)),
+    superimposed: uniform(beam, laidKNm(withoutHeld(task, anchors))),
     traffic,
     warmKNm: imposedCurvature(
       beam,
@@ -130,6 +135,17 @@ export function cantileverModel(
     ).momentKNm,
     mostBottomM: Math.min(mostM, mostOverDepth * pierDepthM),
   };
+}
+
+/** Whether a span holds a longer arm down, so that its ballast is there before the deck is joined. */
+export function holdsDown(anchors: readonly Anchor[], span: number): boolean {
+  return anchors.some(({ firstSpan, lastSpan }) => span >= firstSpan && span <= lastSpan);
+}
+
+function withoutHeld(task: UnitTask, anchors: readonly Anchor[]): UnitTask {
+  const { ballastKNm } = task;
+  if (!ballastKNm || anchors.length === 0) return task;
+  return { ...task, ballastKNm: ballastKNm.map((kNm, span) => (holdsDown(anchors, span) ? 0 : kNm)) };
 }
 
 function towardsPiers(

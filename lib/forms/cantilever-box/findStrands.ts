@@ -87,30 +87,40 @@ function stressesOf(
   };
 }
 
-/** The same at both sides of each pier and never more farther out; at least a tendon a web holds every segment. */
+/**
+ * Never more farther out; at least a tendon a web holds every segment. The same at both sides of a pier whose arms are
+ * built together from end to end; where one goes on alone its tendons are anchored in the other span as far as they are
+ * of use there.
+ */
 function staggeredTop(
   model: CantileverModel,
   weight: StagedWeight,
   need: Float64Array,
   unit: number,
 ): Float64Array {
-  const { arms } = model;
+  const { arms, armAt } = model;
   const out = new Float64Array(need.length);
   const least = unit * model.layout.webs;
   const table = cantileverData.pierTableM.value / 2;
-  for (const [support, mine] of model.towardsPiers) {
-    const armM = arms.find((arm) => arm.support === support)!.armM;
-    let most = 0;
-    let reached = 0;
-    for (const { i, away } of mine) {
-      // A tendon runs on to the end of its segment: half a segment past where it is asked for.
-      while (reached < mine.length && mine[reached]!.away >= away - weight.segmentM / 2) {
-        most = Math.max(most, need[mine[reached]!.i]!);
-        reached++;
+  for (let k = 0; k < arms.length; k += 2) {
+    const mine = model.towardsPiers.get(arms[k]!.support)!;
+    const alike = Math.abs(arms[k]!.armM - arms[k + 1]!.armM) < 1e-9;
+    const pier = mine[mine.length - 1]!.i;
+    const sides = alike ? [mine] : [k, k + 1].map((at) => mine.filter(({ i }) => armAt[i] === at || i === pier));
+    sides.forEach((side, s) => {
+      const { armM } = arms[k + s]!;
+      let most = 0;
+      let reached = 0;
+      for (const { i, away } of side) {
+        // A tendon runs on to the end of its segment: half a segment past where it is asked for.
+        while (reached < side.length && side[reached]!.away >= away - weight.segmentM / 2) {
+          most = Math.max(most, need[side[reached]!.i]!);
+          reached++;
+        }
+        const segments = Math.ceil(Math.max(0, armM - Math.max(away, table)) / weight.segmentM - 1e-6);
+        out[i] = Math.max(out[i]!, most, least * segments);
       }
-      const segments = Math.ceil(Math.max(0, armM - Math.max(away, table)) / weight.segmentM - 1e-6);
-      out[i] = Math.max(most, least * segments);
-    }
+    });
   }
   return out;
 }

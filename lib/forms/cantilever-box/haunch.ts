@@ -18,15 +18,15 @@ export function placeAt(arms: readonly Arm[], supportsM: readonly number[], xM: 
     arm = i;
   });
   if (arm < 0) return { arm, way: 1 };
-  return { arm, way: Math.min(1, nearest / arms[arm]!.haunchM) };
+  return { arm, way: Math.min(1, nearest / arms[arm]!.armM) };
 }
 
 /** Depth over each inner pier, m, by support: that of the longest arms at `pierDepthM`, less over piers of shorter arms. */
 export function pierDepths(arms: readonly Arm[], midspanM: number, pierDepthM: number): Map<number, number> {
-  const longest = Math.max(0, ...arms.map(({ haunchM }) => haunchM));
+  const longest = Math.max(0, ...arms.map(({ armM }) => armM));
   const depths = new Map<number, number>();
-  for (const { support, haunchM } of arms) {
-    const own = midspanM + ((pierDepthM - midspanM) * haunchM) / longest;
+  for (const { support, armM } of arms) {
+    const own = midspanM + ((pierDepthM - midspanM) * armM) / longest;
     depths.set(support, Math.max(own, depths.get(support) ?? 0));
   }
   return depths;

@@ -5,6 +5,7 @@ import { boxData } from '../concrete-box/boxData.ts';
 import type { StressUse } from '../concrete-box/boxStress.ts';
 import type { BendingUse } from '../concrete-box/ultimateBending.ts';
 import type { CantileverModel } from './cantileverModel.ts';
+import type { Hold } from './heldDown.ts';
 import { mostBottomStrands, mostTopStrands } from './findStrands.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
@@ -40,6 +41,7 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
           stress('compression-piers', 'compression of the soffit at the piers', stresses.pierSoffit),
         ]
       : [check('balance', 'pier to cantilever from', 1, 0, 'piers')]),
+    ...holdDown(box.weight.holds),
     moment('bending-spans', 'bending in the spans', bending.sag),
     check(
       'service-bottom',
@@ -88,6 +90,19 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
     ...model.layout.slab.checks,
     ...(model.layout.struts?.checks ?? []),
   ];
+}
+
+/** The support that comes nearest to lifting while a longer arm is built; none where all arms are balanced. */
+export function worstHold(holds: readonly Hold[]): Hold | null {
+  const use = ({ upliftKN, weightKN }: Hold): number => upliftKN / Math.max(1e-9, weightKN);
+  return holds.reduce<Hold | null>((a, b) => (a === null || use(b) > use(a) ? b : a), null);
+}
+
+function holdDown(holds: readonly Hold[]): Check[] {
+  const worst = worstHold(holds);
+  if (!worst) return [];
+  const { upliftKN, weightKN } = worst;
+  return [check('hold-down', 'weight that holds the longer arm of a pier down', upliftKN, weightKN, 'kN')];
 }
 
 function moment(id: string, label: string, use: BendingUse): Check {

@@ -1,6 +1,6 @@
 import type { SupportReaction } from '../../model/index.ts';
+import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
-import { onFalseworkM } from './haunchedLines.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
 /** What the engineer has to know of balance, of unequal arms and of ends that lift. */
@@ -15,12 +15,25 @@ export function haunchedWarnings(
       `Until its arms are joined a pier takes up to ${(weight.unbalancedKNm / 1e3).toFixed(0)} MNm with one arm a segment ahead: built in or propped.`,
     );
   const last = model.task.spansM.length - 1;
-  onFalseworkM(model).forEach((lengthM, span) => {
-    if (span > 0 && span < last && lengthM > weight.segmentM)
-      warnings.push(
-        `Span ${span + 1} is longer than its neighbours: ${lengthM.toFixed(0)} m of it are left between balanced arms and stand on falsework.`,
-      );
-  });
+  for (const hold of weight.holds) {
+    const arm = model.arms[hold.anchor.longer]!;
+    const shorter = model.arms[hold.anchor.shorter]!;
+    if (!(arm.armM > arm.balancedM)) continue;
+    const missingKN = hold.upliftKN - hold.weightKN;
+    const isEnd = hold.support === 0 || hold.support === last + 1;
+    // Ballast along a simple span stands on its end by half.
+    const { holding } = cantileverData.holdDown;
+    const ballastKNm = missingKN / (holding * 0.5 * model.task.spansM[shorter.span]!);
+    warnings.push(
+      `Span ${arm.span + 1}: the last ${(arm.armM - arm.balancedM).toFixed(0)} m of the arm from support ${arm.support + 1} are held down by span ${shorter.span + 1}, joined before: support ${hold.support + 1} would lift by ${(hold.upliftKN / 1e3).toFixed(1)} MN against ${(hold.weightKN / 1e3).toFixed(1)} MN of weight there${
+        missingKN <= 0
+          ? ''
+          : isEnd
+            ? `; ${ballastKNm.toFixed(0)} kN/m more ballast in span ${shorter.span + 1} would hold it`
+            : '; tied down or weighted'
+      }.`,
+    );
+  }
   const factor = model.standard.factors.uls.traffic;
   for (const j of [0, reactions.length - 1]) {
     const { permanentKN, trafficMinKN } = reactions[j]!;

@@ -4,6 +4,7 @@ import type { UnitTask } from '../../model/index.ts';
 import { stiffnessAt, type BoxConcrete } from '../concrete-box/boxConcrete.ts';
 import { trafficOnBox, type BoxTraffic } from '../concrete-box/boxTraffic.ts';
 import { supportPositions } from '../common/supports.ts';
+import { anchorsOf, type Anchor } from './anchors.ts';
 import { tipsM, type Arm } from './arms.ts';
 import { haunchShare, pierDepths, placeAt } from './haunch.ts';
 import { overSupports, type OverSupports } from './parasitic.ts';
@@ -15,6 +16,8 @@ export interface StiffDeck {
   readonly stiffness: Float64Array;
   readonly traffic: BoxTraffic;
   readonly overSupports: OverSupports;
+  /** What holds longer arms down, in the order in which it is called upon. */
+  readonly anchors: readonly Anchor[];
 }
 
 /** Stations of a span. */
@@ -53,16 +56,18 @@ export function stiffDeck(
     if (arm < 0) return concrete;
     return concrete * (1 + (depths.get(arms[arm]!.support)! - 1) * haunchShare(way)) ** exponent;
   };
-  const beam = lineBeam({
+  const geometry = {
     spansM: task.spansM,
     eiKNm2: stiffness,
     stationsPerSpan,
     extraStationsM: tipsM(arms, task.spansM, stationsPerSpan),
-  });
+  };
+  const beam = lineBeam(geometry);
   const made: StiffDeck = {
     beam,
     stiffness: beam.xM.map(stiffness),
     overSupports: overSupports(beam),
+    anchors: anchorsOf(arms, task.light !== undefined, { ...geometry, beam }),
     traffic: trafficOnBox(beam, trafficOnDeck(task.standard, task.deck)),
   };
   if (kept.size >= 64) for (const [oldest] of [...kept].slice(0, 32)) kept.delete(oldest);
