@@ -83,7 +83,7 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
       'inner-height',
       'height inside for the forms',
       boxData.leastInnerM.value,
-      Math.max(0, sections.midspan.outline.innerM),
+      sections.innerM,
       'm',
     ),
     trafficDeflection(model, model.concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4),

@@ -65,7 +65,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,
     bottomSlabAtPiersM: thicknesses.pierBottomM,
-    boxInnerHeightM: Math.max(0, sections.midspan.outline.innerM),
+    boxInnerHeightM: sections.innerM,
     areaM2: sections.midspan.areaM2,
     inertiaM4: sections.midspan.inertiaM4,
     centroidFromTopM: sections.midspan.topM,

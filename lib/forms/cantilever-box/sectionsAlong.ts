@@ -3,16 +3,48 @@ import { formworkPerM } from '../concrete-box/boxLines.ts';
 import { boxSection, type BoxSection } from '../concrete-box/boxSection.ts';
 import type { Thicknesses } from '../concrete-box/sectionsAlong.ts';
 import { cantileverData } from './cantileverData.ts';
-import type { CantileverModel } from './cantileverModel.ts';
+import { holdsDown, type CantileverModel } from './cantileverModel.ts';
 import { haunchShare } from './haunch.ts';
+
+/** Thicknesses away from the supports, m. */
+export type MiddleThicknesses = Pick<Thicknesses, 'webM' | 'bottomM'>;
+
+/**
+ * Thicknesses that are sought. A span that holds a longer arm down hogs far from its pier where the arm does not: it has a
+ * web and a bottom slab of its own, so that they do not weigh on the arm.
+ */
+export interface HaunchedThicknesses extends Thicknesses {
+  /** By span; null in spans that have those of all others. */
+  readonly holding: readonly (MiddleThicknesses | null)[];
+}
+
+/** Thicknesses of a span away from its supports. */
+export function middleOf(t: HaunchedThicknesses, span: number): MiddleThicknesses {
+  return t.holding[span] ?? t;
+}
+
+/** The same thicknesses for a start, those of holding spans apart. */
+export function startThicknesses(model: CantileverModel): HaunchedThicknesses {
+  const middle = { webM: model.leastWebM, bottomM: model.leastBottomM };
+  return {
+    ...middle,
+    supportWebM: model.leastWebM,
+    pierBottomM: model.leastBottomM,
+    holding: model.task.spansM.map((_, span) => (holdsDown(model.anchors, span) ? middle : null)),
+  };
+}
 
 /** The haunched box at the stations of its beam. */
 export interface HaunchedSections {
+  /** Of the spans that hold no arm down. */
   readonly midspan: BoxSection;
+  /** Least height of the cells, m. */
+  readonly innerM: number;
   /** Over the pier of the longest arms. */
   readonly pier: BoxSection;
   readonly pierAt: ReadonlyMap<number, BoxSection>;
-  readonly end: BoxSection;
+  /** Over the first and the last support. */
+  readonly ends: readonly [BoxSection, BoxSection];
   readonly webM: Float64Array;
   readonly bottomM: Float64Array;
   readonly areaM2: Float64Array;
@@ -21,10 +53,10 @@ export interface HaunchedSections {
   readonly topM: Float64Array;
   readonly lowM: Float64Array;
   readonly bottomWidthM: Float64Array;
-  /** Sections at the knots of the arms of each inner pier. */
-  readonly atKnots: ReadonlyMap<number, readonly BoxSection[]>;
-  /** Area along the arms of each inner pier, by way from the pier, m2. */
-  readonly armAreaM2: ReadonlyMap<number, (way: number) => number>;
+  /** Sections at the knots of every arm. */
+  readonly atKnots: readonly (readonly BoxSection[])[];
+  /** Area along every arm, by way from its pier, m2. */
+  readonly armAreaM2: readonly ((way: number) => number)[];
 }
 
 /** Ways from the pier at which sections are worked out; straight between them. */
@@ -67,62 +99,69 @@ function numbersOf(s: BoxSection): Numbers {
 }
 
 /** Sections at knots of each arm, properties straight between them; webs thicken again beside the abutments. */
-export function haunchedSections(model: CantileverModel, t: Thicknesses): HaunchedSections {
-  const { layout, task, beam, depthsM } = model;
-  const midspan = boxSection(layout, task.depthM, t.webM, t.bottomM);
-  const end = boxSection(layout, task.depthM, t.supportWebM, t.bottomM);
+export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses): HaunchedSections {
+  const { layout, task, beam, depthsM, arms } = model;
+  const last = task.spansM.length - 1;
+  const middles = task.spansM.map((_, span) => {
+    const { webM, bottomM } = middleOf(t, span);
+    return boxSection(layout, task.depthM, webM, bottomM);
+  });
+  const midspan = t.holding.every((own) => own !== null)
+    ? middles[0]!
+    : middles[t.holding.findIndex((own) => own === null)]!;
+  const endOf = (span: number): BoxSection =>
+    boxSection(layout, task.depthM, t.supportWebM, middleOf(t, span).bottomM);
+  const ends = [endOf(0), endOf(last)] as const;
   const pierAt = new Map<number, BoxSection>();
-  const onArms = new Map<number, readonly Numbers[]>();
-  const armAreaM2 = new Map<number, (way: number) => number>();
-  const atKnots = new Map<number, readonly BoxSection[]>();
   const made = new Map<
     string,
     { readonly at: readonly BoxSection[]; readonly numbers: readonly Numbers[] }
   >();
-  for (const [support, depthM] of depthsM) {
-    const key = depthM.toFixed(4);
+  const onArms = arms.map(({ support, span }) => {
+    const depthM = depthsM.get(support)!;
+    const { webM, bottomM } = middleOf(t, span);
+    const key = [depthM.toFixed(4), webM, bottomM].join();
     let known = made.get(key);
     if (!known) {
       const sections = knots.map((way) =>
         boxSection(
           layout,
           task.depthM + (depthM - task.depthM) * haunchShare(way),
-          t.webM + (t.supportWebM - t.webM) * webShareOnArm(way),
-          t.bottomM + (t.pierBottomM - t.bottomM) * slabShare(way),
+          webM + (t.supportWebM - webM) * webShareOnArm(way),
+          bottomM + (t.pierBottomM - bottomM) * slabShare(way),
         ),
       );
       known = { at: sections, numbers: sections.map(numbersOf) };
       made.set(key, known);
     }
-    const { numbers } = known;
-    atKnots.set(support, known.at);
     pierAt.set(support, known.at[0]!);
-    onArms.set(support, numbers);
-    armAreaM2.set(support, (way) => {
-      const [k, share] = between(way);
-      return numbers[k]![2] + share * (numbers[k + 1]![2] - numbers[k]![2]);
-    });
-  }
+    return known;
+  });
   const n = beam.xM.length;
   const arrays = Array.from({ length: 7 }, () => new Float64Array(n));
-  const [mid, abutment] = [numbersOf(midspan), numbersOf(end)];
+  const mids = middles.map(numbersOf);
+  const abutments = ends.map(numbersOf);
   for (let i = 0; i < n; i++) {
-    const arm = model.arms[model.armAt[i]!];
-    const numbers = arm ? onArms.get(arm.support)! : [mid];
-    const [k, share] = arm ? between(model.way[i]!) : [0, 0];
+    const arm = model.armAt[i]!;
+    const numbers = arm >= 0 ? onArms[arm]!.numbers : mids;
+    const [k, share] = arm >= 0 ? between(model.way[i]!) : [0, 0];
     const atEnd = webShareAtEnd(model, i);
+    const isFirst = 2 * beam.xM[i]! < model.lengthM;
+    const abutment = abutments[isFirst ? 0 : 1]!;
+    const mid = mids[isFirst ? 0 : last]!;
     for (let j = 0; j < 7; j++) {
       const near = numbers[k]![j]!;
       const far = numbers[k + 1]?.[j] ?? near;
       arrays[j]![i] = near + share * (far - near) + atEnd * (abutment[j]! - mid[j]!);
     }
   }
-  const deepest = [...pierAt.values()].reduce((a, b) => (b.depthM > a.depthM ? b : a), end);
+  const deepest = [...pierAt.values()].reduce((a, b) => (b.depthM > a.depthM ? b : a), ends[0]);
   return {
     midspan,
+    innerM: Math.max(0, Math.min(...middles.map(({ outline }) => outline.innerM))),
     pier: deepest,
     pierAt,
-    end,
+    ends,
     webM: arrays[0]!,
     bottomM: arrays[1]!,
     areaM2: arrays[2]!,
@@ -130,21 +169,21 @@ export function haunchedSections(model: CantileverModel, t: Thicknesses): Haunch
     topM: arrays[4]!,
     lowM: arrays[5]!,
     bottomWidthM: arrays[6]!,
-    atKnots,
-    armAreaM2,
+    atKnots: onArms.map(({ at }) => at),
+    armAreaM2: onArms.map(({ numbers }) => (way: number): number => {
+      const [k, share] = between(way);
+      return numbers[k]![2] + share * (numbers[k + 1]![2] - numbers[k]![2]);
+    }),
   };
 }
 
 /** Formed faces per m of deck at the stations, m. */
 export function formsAlong(model: CantileverModel, sections: HaunchedSections): Float64Array {
-  const atKnots = new Map(
-    [...sections.atKnots].map(([support, at]) => [support, at.map(({ outline }) => formworkPerM(outline))]),
-  );
+  const atKnots = sections.atKnots.map((at) => at.map(({ outline }) => formworkPerM(outline)));
   const midspan = formworkPerM(sections.midspan.outline);
   return model.way.map((way, i) => {
-    const arm = model.arms[model.armAt[i]!];
-    if (!arm) return midspan;
-    const at = atKnots.get(arm.support)!;
+    const at = atKnots[model.armAt[i]!];
+    if (!at) return midspan;
     const [k, share] = between(way);
     return at[k]! + share * (at[k + 1]! - at[k]!);
   });

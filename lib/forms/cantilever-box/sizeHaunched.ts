@@ -2,7 +2,6 @@ import { ofElement } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { roundUp } from '../concrete-box/boxModel.ts';
 import { thicker } from '../concrete-box/sizeBox.ts';
-import type { Thicknesses } from '../concrete-box/sectionsAlong.ts';
 import { webNeeded, webShear, type WebUse } from '../concrete-box/webShear.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { findStrands, type FoundStrands } from './findStrands.ts';
@@ -10,17 +9,21 @@ import { haunchedBending, zonesM, type HaunchedBending } from './haunchedBending
 import { haunchedShear, webDuctM, type HaunchedShear } from './haunchedShear.ts';
 import {
   haunchedSections,
+  middleOf,
   slabShare,
+  startThicknesses,
   webShareAtEnd,
   webShareOnArm,
   type HaunchedSections,
+  type HaunchedThicknesses,
+  type MiddleThicknesses,
 } from './sectionsAlong.ts';
 import { stagedWeight, type StagedWeight } from './stages.ts';
 import { haunchedStresses, type HaunchedStresses } from './stresses.ts';
 
 /** A haunched box with its thicknesses, tendons and stirrups. */
 export interface SizedHaunched {
-  readonly thicknesses: Thicknesses;
+  readonly thicknesses: HaunchedThicknesses;
   readonly sections: HaunchedSections;
   readonly weight: StagedWeight;
   readonly found: FoundStrands;
@@ -44,12 +47,7 @@ const leastShare = 0.2;
  * tendons and creep follow each time.
  */
 export function sizeHaunched(model: CantileverModel, start: SizedHaunched | null): SizedHaunched {
-  let thicknesses: Thicknesses = start?.thicknesses ?? {
-    webM: model.leastWebM,
-    supportWebM: model.leastWebM,
-    bottomM: model.leastBottomM,
-    pierBottomM: model.leastBottomM,
-  };
+  let thicknesses = start?.thicknesses ?? startThicknesses(model);
   let found: FoundStrands | null = null;
   for (let pass = 1; ; pass++) {
     const box = workOut(model, thicknesses, found);
@@ -61,7 +59,7 @@ export function sizeHaunched(model: CantileverModel, start: SizedHaunched | null
   }
 }
 
-function workOut(model: CantileverModel, thicknesses: Thicknesses, before: FoundStrands | null): Unbent {
+function workOut(model: CantileverModel, thicknesses: HaunchedThicknesses, before: FoundStrands | null): Unbent {
   const sections = haunchedSections(model, thicknesses);
   const weight = stagedWeight(model, sections);
   const found = findStrands(model, sections, weight, before);
@@ -85,40 +83,59 @@ function webOf(sections: HaunchedSections, element: number): number {
 }
 
 /** Thicker where needed; the same object where nothing is too weak or nothing more can be done. */
-function grow(model: CantileverModel, box: Unbent): Thicknesses {
+function grow(model: CantileverModel, box: Unbent): HaunchedThicknesses {
   const t = box.thicknesses;
   const { sections, stresses } = box;
   const zones = zonesM(model, sections, box.weight, box.found);
-  let { webM, supportWebM, bottomM, pierBottomM } = t;
+  let { supportWebM, pierBottomM } = t;
+  // What a span asks for: its own where it holds an arm down, else that of all others.
+  const webs = model.task.spansM.map((_, span) => middleOf(t, span).webM);
+  const bottoms = model.task.spansM.map((_, span) => middleOf(t, span).bottomM);
   const mostBottomM = roundUp(model.mostBottomM);
   const slab = (needM: number): number => Math.min(mostBottomM, roundUp(needM));
+  const { supportAt } = model.beam;
+  let span = 0;
   for (let i = 0; i < sections.areaM2.length; i++) {
+    if (i > supportAt[span + 1]!) span++;
     const now = sections.bottomM[i]!;
     const use = stresses.soffitUse[i]!;
     const need = Math.max(zones[i]!, use > 1 ? thicker(now, use) : 0);
     if (!(need > now + 1e-6)) continue;
     const share = model.armAt[i]! >= 0 ? slabShare(model.way[i]!) : 0;
-    if (share < leastShare) bottomM = Math.max(bottomM, slab(need));
-    else pierBottomM = Math.max(pierBottomM, slab(t.bottomM + (need - t.bottomM) / share));
+    const { bottomM } = middleOf(t, span);
+    if (share < leastShare) bottoms[span] = Math.max(bottoms[span]!, slab(need));
+    else pierBottomM = Math.max(pierBottomM, slab(bottomM + (need - bottomM) / share));
   }
-  pierBottomM = Math.max(pierBottomM, bottomM);
 
   const most = boxData.webMostM.value;
   const webShare = (i: number): number =>
     Math.max(model.armAt[i]! >= 0 ? webShareOnArm(model.way[i]!) : 0, webShareAtEnd(model, i));
+  span = 0;
   box.shear.demands.forEach((demand, e) => {
+    if (e >= supportAt[span + 1]!) span++;
     const now = webOf(sections, e);
     const need = Math.min(most, webNeeded(ofElement(model, e), now, webDuctM(), demand));
     if (!(need > now + 1e-9)) return;
     const share = (webShare(e) + webShare(e + 1)) / 2;
-    if (share < leastShare) webM = Math.max(webM, roundUp(need));
-    else supportWebM = Math.max(supportWebM, Math.min(most, roundUp(t.webM + (need - t.webM) / share)));
+    const { webM } = middleOf(t, span);
+    if (share < leastShare) webs[span] = Math.max(webs[span]!, roundUp(need));
+    else supportWebM = Math.max(supportWebM, Math.min(most, roundUp(webM + (need - webM) / share)));
   });
-  supportWebM = Math.max(supportWebM, webM);
+  const common = (values: readonly number[], known: number): number =>
+    Math.max(known, ...values.filter((_, k) => t.holding[k] === null));
+  const grown: HaunchedThicknesses = {
+    webM: common(webs, t.webM),
+    supportWebM: Math.max(supportWebM, ...webs),
+    bottomM: common(bottoms, t.bottomM),
+    pierBottomM: Math.max(pierBottomM, ...bottoms),
+    holding: t.holding.map((own, k) => own && { webM: webs[k]!, bottomM: bottoms[k]! }),
+  };
+  const alike = (a: MiddleThicknesses | null, b: MiddleThicknesses | null): boolean =>
+    a?.webM === b?.webM && a?.bottomM === b?.bottomM;
   const same =
-    webM === t.webM &&
-    supportWebM === t.supportWebM &&
-    bottomM === t.bottomM &&
-    pierBottomM === t.pierBottomM;
-  return same ? t : { webM, supportWebM, bottomM, pierBottomM };
+    alike(grown, t) &&
+    grown.supportWebM === t.supportWebM &&
+    grown.pierBottomM === t.pierBottomM &&
+    grown.holding.every((own, k) => alike(own, t.holding[k]!));
+  return same ? t : grown;
 }

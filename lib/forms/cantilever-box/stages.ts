@@ -100,7 +100,7 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   const late = new Float64Array(n - 1);
   for (let e = 0; e < n - 1; e++) if (!armOf[e]) late[e] = (loadKNm[e]! + loadKNm[e + 1]!) / 2;
   const diaphragms = supportsM.map((_, j) =>
-    diaphragmM3(sections.pierAt.get(j) ?? sections.end, sections.pierAt.has(j)),
+    diaphragmM3(sections.pierAt.get(j) ?? sections.ends[j === 0 ? 0 : 1], sections.pierAt.has(j)),
   );
   const held = heldDown(model, {
     arms: free,
@@ -209,15 +209,16 @@ function freeArms(
   travellerKN: number,
   segmentM: number,
 ): (arm: Arm, lengthM: number) => CantileverMoments {
+  const { arms, light } = model;
   const { share } = boxData.blisters;
   const made = new Map<string, CantileverMoments>();
   return (arm, lengthM) => {
-    // Lightweight concrete is not the same in every span.
+    // Lightweight concrete is not the same in every span, nor are the thicknesses of one that holds an arm down.
     const key = [
       model.depthsM.get(arm.support)!,
       arm.armM,
       lengthM,
-      model.light ? arm.side * arm.pierM : 0,
+      light || model.anchors.length > 0 ? arm.side * arm.pierM : 0,
     ]
       .map((v) => v.toFixed(6))
       .join();
@@ -229,7 +230,7 @@ function freeArms(
       const b = arm.pierM + arm.side * Math.min(lengthM, fromPierM + slice);
       return (1 + share) * weightOver(model, Math.min(a, b), Math.max(a, b));
     };
-    const areaM2 = sections.armAreaM2.get(arm.support)!;
+    const areaM2 = sections.armAreaM2[arms.indexOf(arm)]!;
     const deeperM = model.depthsM.get(arm.support)! - model.task.depthM;
     const at = cantileverStages(
       {
