@@ -1,4 +1,5 @@
 import { boxData } from '../concrete-box/boxData.ts';
+import type { Arm } from './arms.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
@@ -98,15 +99,19 @@ function staggeredTop(
   need: Float64Array,
   unit: number,
 ): Float64Array {
-  const { arms, armAt } = model;
+  const { arms } = model;
   const out = new Float64Array(need.length);
   const least = unit * model.layout.webs;
   const table = cantileverData.pierTableM.value / 2;
   for (let k = 0; k < arms.length; k += 2) {
-    const mine = model.towardsPiers.get(arms[k]!.support)!;
     const alike = Math.abs(arms[k]!.armM - arms[k + 1]!.armM) < 1e-9;
-    const pier = mine[mine.length - 1]!.i;
-    const sides = alike ? [mine] : [k, k + 1].map((at) => mine.filter(({ i }) => armAt[i] === at || i === pier));
+    const both = [towardsPier(model, arms[k]!), towardsPier(model, arms[k + 1]!)];
+    const together = (): Side =>
+      // With unlike arms in the deck the middle of a span is asked from both of its piers, else from the one it is counted to.
+      model.anchors.length > 0
+        ? both.flat().sort((a, b) => b.away - a.away)
+        : model.towardsPiers.get(arms[k]!.support)!;
+    const sides = alike ? [together()] : both;
     sides.forEach((side, s) => {
       const { armM } = arms[k + s]!;
       let most = 0;
@@ -123,6 +128,24 @@ function staggeredTop(
     });
   }
   return out;
+}
+
+/** Stations beside a pier and their distance from it, m, the farthest first. */
+type Side = readonly { readonly i: number; readonly away: number }[];
+
+/** Stations of one side of a pier, from the middle of its span (or its end) inwards. */
+function towardsPier(
+  { beam, task }: CantileverModel,
+  { span, side, pierM }: Arm,
+): Side {
+  const isEnd = span === 0 || span === task.spansM.length - 1;
+  const mostM = (isEnd ? 1 : 0.5) * task.spansM[span]! + 1e-6;
+  const stations: { readonly i: number; readonly away: number }[] = [];
+  for (let i = beam.supportAt[span]!; i <= beam.supportAt[span + 1]!; i++) {
+    const away = side * (beam.xM[i]! - pierM);
+    if (away <= mostM) stations.push({ i, away });
+  }
+  return stations.sort((a, b) => b.away - a.away);
 }
 
 /** Never more towards the supports of a span than farther in; anchored past the section that needs them. */

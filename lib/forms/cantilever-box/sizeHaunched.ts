@@ -121,6 +121,8 @@ function grow(model: CantileverModel, box: Unbent): HaunchedThicknesses {
     if (share < leastShare) webs[span] = Math.max(webs[span]!, roundUp(need));
     else supportWebM = Math.max(supportWebM, Math.min(most, roundUp(webM + (need - webM) / share)));
   });
+  // Arms that balance each other weigh the same: their spans have the same thicknesses.
+  for (const values of [webs, bottoms]) evenOut(model, t, values);
   const common = (values: readonly number[], known: number): number =>
     Math.max(known, ...values.filter((_, k) => t.holding[k] === null));
   const grown: HaunchedThicknesses = {
@@ -138,4 +140,17 @@ function grow(model: CantileverModel, box: Unbent): HaunchedThicknesses {
     grown.pierBottomM === t.pierBottomM &&
     grown.holding.every((own, k) => alike(own, t.holding[k]!));
   return same ? t : grown;
+}
+
+/** Raises what holding spans ask for to that of the other side of a pier whose arms balance each other. */
+function evenOut({ arms, anchors }: CantileverModel, t: HaunchedThicknesses, values: number[]): void {
+  const balanced = arms.filter(
+    ({ side, span, support }) =>
+      side < 0 &&
+      t.holding[span] !== null &&
+      t.holding[span + 1] !== null &&
+      !anchors.some((anchor) => anchor.support === support),
+  );
+  for (const ordered of [balanced, [...balanced].reverse()])
+    for (const { span } of ordered) values[span] = values[span + 1] = Math.max(values[span]!, values[span + 1]!);
 }
