@@ -3,6 +3,7 @@ export { lineBeam, type LineBeam } from './beam/lineBeam.ts';
 export type { Effects } from './beam/effects.ts';
 export {
   distributed,
+  elementAt,
   imposedCurvature,
   pointLoads,
   settle,

@@ -53,7 +53,15 @@ export function anchorsOf(arms: readonly Arm[], isLight: boolean, whole: Whole):
       far += side;
     const [firstSpan, lastSpan] = [Math.min(near, far), Math.max(near, far)];
     const { support } = left;
-    anchors.push({ longer, shorter, support, side, firstSpan, lastSpan, ...joined(whole, firstSpan, lastSpan, side) });
+    anchors.push({
+      longer,
+      shorter,
+      support,
+      side,
+      firstSpan,
+      lastSpan,
+      ...joined(whole, firstSpan, lastSpan, side),
+    });
   }
   return anchors.sort((a, b) => arms[a.longer]!.armM - arms[b.longer]!.armM);
 }
@@ -79,7 +87,7 @@ function joined(
   const effects = pointLoads(beyond, [{ xM: atEnd ? toM - fromM + 1 : -1, loadKN: 1 }]);
   const { supportAt } = beyond;
   const cut = (values: Float64Array): Float64Array =>
-    values.slice(supportAt[0]!, supportAt[supportAt.length - 1]! + 1);
+    values.slice(supportAt[0], supportAt[supportAt.length - 1]! + 1);
   const reactionKN = effects.reactionKN.slice();
   // A couple has no weight.
   reactionKN[atEnd ? reactionKN.length - 1 : 0]! -= 1;

@@ -64,8 +64,7 @@ export function cantileverBase(task: UnitTask): CantileverBase {
   const { spansM, standard: standardId } = task;
   const supportsM = supportPositions(spansM);
   const arms = armsOf(spansM);
-  const governingM =
-    arms.length > 0 ? 2 * Math.max(...arms.map(({ armM }) => armM)) : Math.max(...spansM);
+  const governingM = arms.length > 0 ? 2 * Math.max(...arms.map(({ armM }) => armM)) : Math.max(...spansM);
   const layout = boxLayout(
     task,
     Math.max(task.depthM, depthBand('cantilever-box', 'continuous')[1] * governingM),
@@ -102,7 +101,11 @@ export function cantileverModel(
   const { task, arms, supportsM, layout } = base;
   const { mostM, mostOverDepth } = cantileverData.bottomSlab;
   const depthsM = pierDepths(arms, task.depthM, pierDepthM);
-  const { beam, stiffness, traffic, overSupports, anchors } = stiffDeck(base, pierDepthM / task.depthM, power);
+  const { beam, stiffness, traffic, overSupports, anchors } = stiffDeck(
+    base,
+    pierDepthM / task.depthM,
+    power,
+  );
   const n = beam.xM.length;
   const armAt = new Int16Array(n);
   const way = new Float64Array(n);

@@ -26,6 +26,12 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
     'EN 1992-1-1 6.1 (from memory)',
   ),
   ...check(
+    'hold-down',
+    ['uplift where the longer arm of a pier comes nearest to lifting a support', 'upliftKN'],
+    ['weight that stands there', 'holdingKN'],
+    'EN 1990 table A2.4(A) (from memory)',
+  ),
+  ...check(
     'bending-piers',
     [
       'gamma G weight + gamma Q traffic + parasitic moment, just joined or after creep, whichever is more',

@@ -134,10 +134,7 @@ function staggeredTop(
 type Side = readonly { readonly i: number; readonly away: number }[];
 
 /** Stations of one side of a pier, from the middle of its span (or its end) inwards. */
-function towardsPier(
-  { beam, task }: CantileverModel,
-  { span, side, pierM }: Arm,
-): Side {
+function towardsPier({ beam, task }: CantileverModel, { span, side, pierM }: Arm): Side {
   const isEnd = span === 0 || span === task.spansM.length - 1;
   const mostM = (isEnd ? 1 : 0.5) * task.spansM[span]! + 1e-6;
   const stations: { readonly i: number; readonly away: number }[] = [];

@@ -1,13 +1,18 @@
 import type { Check } from '../../model/index.ts';
+import { elementAt, lineBeam } from '../../mechanics/index.ts';
 import { check } from '../common/checks.ts';
 import { trafficDeflection } from '../concrete-box/boxChecks.ts';
+import { stiffnessAt } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import type { StressUse } from '../concrete-box/boxStress.ts';
 import type { BendingUse } from '../concrete-box/ultimateBending.ts';
+import { tipsM } from './arms.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { Hold } from './heldDown.ts';
 import { mostBottomStrands, mostTopStrands } from './findStrands.ts';
+import type { HaunchedSections } from './sectionsAlong.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
+import { stationsPerSpan } from './stiffDeck.ts';
 
 /** All limit states of a haunched box and of its top slab; labels as they are printed. */
 export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Check[] {
@@ -79,14 +84,8 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
       mostBottomStrands(sections),
       'strands',
     ),
-    check(
-      'inner-height',
-      'height inside for the forms',
-      boxData.leastInnerM.value,
-      sections.innerM,
-      'm',
-    ),
-    trafficDeflection(model, model.concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4),
+    check('inner-height', 'height inside for the forms', boxData.leastInnerM.value, sections.innerM, 'm'),
+    deflection(model, sections),
     ...model.layout.slab.checks,
     ...(model.layout.struts?.checks ?? []),
   ];
@@ -103,6 +102,28 @@ function holdDown(holds: readonly Hold[]): Check[] {
   if (!worst) return [];
   const { upliftKN, weightKN } = worst;
   return [check('hold-down', 'weight that holds the longer arm of a pier down', upliftKN, weightKN, 'kN')];
+}
+
+/**
+ * Deflection on the beam whose stiffness follows a law of the depth; where spans that hold an arm down have thicknesses of
+ * their own that law does not know, on the beam of the sections found.
+ */
+function deflection(model: CantileverModel, sections: HaunchedSections): Check {
+  const { beam, task } = model;
+  const eiKNm2 = model.concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4;
+  if (model.anchors.length === 0) return trafficDeflection(model, eiKNm2);
+  const found = lineBeam({
+    spansM: task.spansM,
+    stationsPerSpan,
+    extraStationsM: tipsM(model.arms, task.spansM, stationsPerSpan),
+    eiKNm2: (xM) => {
+      const e = elementAt(beam.xM, xM);
+      const share = (xM - beam.xM[e]!) / (beam.xM[e + 1]! - beam.xM[e]!);
+      const inertiaM4 = (1 - share) * sections.inertiaM4[e]! + share * sections.inertiaM4[e + 1]!;
+      return stiffnessAt(model, xM) * (inertiaM4 / sections.midspan.inertiaM4);
+    },
+  });
+  return trafficDeflection({ ...model, beam: found }, eiKNm2);
 }
 
 function moment(id: string, label: string, use: BendingUse): Check {

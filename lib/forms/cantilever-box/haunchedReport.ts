@@ -4,6 +4,7 @@ import { madeFigures } from '../concrete-box/boxConcrete.ts';
 import { strutBarsKg, strutFigures } from '../concrete-box/boxReport.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
+import { worstHold } from './haunchedChecks.ts';
 import { along, onFalseworkM, strandTotalKg, strutsTotalM3, travellersOf } from './haunchedLines.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
@@ -38,6 +39,23 @@ export function haunchedOwnShare(model: CantileverModel, { weight }: SizedHaunch
     share = own / total;
   }
   return Math.min(1, Math.max(0, share));
+}
+
+/** Named figures of arms that are held down and of the spans that hold them; none where all arms are balanced. */
+function heldFigures(model: CantileverModel, { weight, thicknesses }: SizedHaunched): Record<string, number> {
+  const worst = worstHold(weight.holds);
+  if (!worst) return {};
+  const figures: Record<string, number> = {
+    heldArmM: Math.max(...model.arms.map(({ armM, balancedM }) => armM - balancedM)),
+    upliftKN: worst.upliftKN,
+    holdingKN: worst.weightKN,
+  };
+  thicknesses.holding.forEach((own, span) => {
+    if (!own) return;
+    figures[`span${span + 1}HoldingWebM`] = own.webM;
+    figures[`span${span + 1}HoldingBottomM`] = own.bottomM;
+  });
+  return figures;
 }
 
 /** Named figures of section, stages, statics and tendons. */
@@ -96,6 +114,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     barsKgM3: (haunchedBars(model, box).totalKg + strutBarsKg(layout.struts, strutsM3, lengthM)) / concreteM3,
     strandKgM2: strandTotalKg(model, box) / areaM2,
   };
+  Object.assign(figures, heldFigures(model, box));
   Object.assign(figures, madeFigures(model, beam.xM, sections.areaM2));
   for (let span = 0; span < task.spansM.length; span++) {
     const middle = middleStation(beam, span);

@@ -102,7 +102,9 @@ export function heldDown(model: CantileverModel, before: FreeArms): HeldDown {
     const { longer, shorter } = anchor;
     const longerKNm = rootKNm(longer) - travellerKNm(longer);
     const shorterKNm = rootKNm(shorter) - travellerKNm(shorter);
-    holds.push(holdOf(anchor, longerKNm, shorterKNm, travellerKNm(longer), ownKN));
+    // Equal arms of unlike concrete: the heavier side stands on its own.
+    if (longerKNm > shorterKNm)
+      holds.push(holdOf(anchor, longerKNm, shorterKNm, travellerKNm(longer), ownKN));
     hogged.reactionKN.forEach((kN, j) => {
       ownKN[firstSpan + j]! += (longerKNm - shorterKNm) * kN;
     });

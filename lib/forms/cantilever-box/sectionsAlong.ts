@@ -26,11 +26,15 @@ export function middleOf(t: HaunchedThicknesses, span: number): MiddleThicknesse
 /** The same thicknesses for a start, those of holding spans apart. */
 export function startThicknesses(model: CantileverModel): HaunchedThicknesses {
   const middle = { webM: model.leastWebM, bottomM: model.leastBottomM };
+  const goingOn = model.anchors.filter(({ longer }) => {
+    const { armM, balancedM } = model.arms[longer]!;
+    return armM > balancedM;
+  });
   return {
     ...middle,
     supportWebM: model.leastWebM,
     pierBottomM: model.leastBottomM,
-    holding: model.task.spansM.map((_, span) => (holdsDown(model.anchors, span) ? middle : null)),
+    holding: model.task.spansM.map((_, span) => (holdsDown(goingOn, span) ? middle : null)),
   };
 }
 

@@ -59,7 +59,11 @@ export function sizeHaunched(model: CantileverModel, start: SizedHaunched | null
   }
 }
 
-function workOut(model: CantileverModel, thicknesses: HaunchedThicknesses, before: FoundStrands | null): Unbent {
+function workOut(
+  model: CantileverModel,
+  thicknesses: HaunchedThicknesses,
+  before: FoundStrands | null,
+): Unbent {
   const sections = haunchedSections(model, thicknesses);
   const weight = stagedWeight(model, sections);
   const found = findStrands(model, sections, weight, before);
@@ -152,5 +156,6 @@ function evenOut({ arms, anchors }: CantileverModel, t: HaunchedThicknesses, val
       !anchors.some((anchor) => anchor.support === support),
   );
   for (const ordered of [balanced, [...balanced].reverse()])
-    for (const { span } of ordered) values[span] = values[span + 1] = Math.max(values[span]!, values[span + 1]!);
+    for (const { span } of ordered)
+      values[span] = values[span + 1] = Math.max(values[span]!, values[span + 1]!);
 }

@@ -145,11 +145,7 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
     0,
     ...onPier.map(({ arm, at }, k) => {
       const unlike = Math.abs(at.momentKNm[0]! - onPier[k - arm.side]!.at.momentKNm[0]!);
-      return (
-        at.pierMomentKNm +
-        unlike +
-        ownShare * Math.abs(at.momentKNm[0]! + travellerKN * arm.balancedM)
-      );
+      return at.pierMomentKNm + unlike + ownShare * Math.abs(at.momentKNm[0]! + travellerKN * arm.balancedM);
     }),
   );
   return {
