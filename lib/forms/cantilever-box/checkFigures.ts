@@ -142,5 +142,10 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
       'data/cantilever-box/bottomTendons/layers',
     ],
   ),
+  ...check(
+    'ballast-room',
+    ['ballast of a span / its weight per m3', 'ballastKN', 'data/concrete-box/ballast/weightKNm3'],
+    ['area of the cells along that span', 'spans', './task/depthM', './depthM/support', 'webSpacingM'],
+  ),
   ...anyBoxFigures(manual),
 ];

@@ -10,7 +10,7 @@ import { tipsM } from './arms.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { Hold } from './heldDown.ts';
 import { mostBottomStrands, mostTopStrands } from './findStrands.ts';
-import type { HaunchedSections } from './sectionsAlong.ts';
+import { cellsAlong, type HaunchedSections } from './sectionsAlong.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 import { stationsPerSpan } from './stiffDeck.ts';
 
@@ -84,6 +84,7 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
       mostBottomStrands(sections),
       'strands',
     ),
+    ...ballastRoom(model, sections),
     check('inner-height', 'height inside for the forms', boxData.leastInnerM.value, sections.innerM, 'm'),
     deflection(model, sections),
     ...model.layout.slab.checks,
@@ -124,6 +125,22 @@ function deflection(model: CantileverModel, sections: HaunchedSections): Check {
     },
   });
   return trafficDeflection({ ...model, beam: found }, eiKNm2);
+}
+
+/** Gravel of the span that is filled most against its cells, m3; none without ballast. */
+function ballastRoom(model: CantileverModel, sections: HaunchedSections): Check[] {
+  const { beam, task } = model;
+  const { ballastKNm } = task;
+  if (!ballastKNm?.some((kNm) => kNm > 0)) return [];
+  const cellsM2 = cellsAlong(model, sections);
+  const checks = task.spansM.map((spanM, span) => {
+    let roomM3 = 0;
+    for (let e = beam.supportAt[span]!; e < beam.supportAt[span + 1]!; e++)
+      roomM3 += ((cellsM2[e]! + cellsM2[e + 1]!) / 2) * (beam.xM[e + 1]! - beam.xM[e]!);
+    const fillM3 = (ballastKNm[span]! * spanM) / boxData.ballast.weightKNm3;
+    return check('ballast-room', 'ballast that the cells of a span have room for', fillM3, roomM3, 'm3');
+  });
+  return [checks.reduce((worst, next) => (next.utilisation > worst.utilisation ? next : worst))];
 }
 
 function moment(id: string, label: string, use: BendingUse): Check {

@@ -1,5 +1,7 @@
 import { boxData } from '../concrete-box/boxData.ts';
 import { formworkPerM } from '../concrete-box/boxLines.ts';
+import { polygonProperties } from '../../mechanics/index.ts';
+import type { Outline } from '../concrete-box/boxOutline.ts';
 import { boxSection, type BoxSection } from '../concrete-box/boxSection.ts';
 import type { Thicknesses } from '../concrete-box/sectionsAlong.ts';
 import { cantileverData } from './cantileverData.ts';
@@ -183,8 +185,24 @@ export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses)
 
 /** Formed faces per m of deck at the stations, m. */
 export function formsAlong(model: CantileverModel, sections: HaunchedSections): Float64Array {
-  const atKnots = sections.atKnots.map((at) => at.map(({ outline }) => formworkPerM(outline)));
-  const midspan = formworkPerM(sections.midspan.outline);
+  return outlinesAlong(model, sections, formworkPerM);
+}
+
+/** Area of the cells at the stations, m2. */
+export function cellsAlong(model: CantileverModel, sections: HaunchedSections): Float64Array {
+  return outlinesAlong(model, sections, ({ cells }) =>
+    cells.reduce((sum, cell) => sum + polygonProperties(cell).areaM2, 0),
+  );
+}
+
+/** What is measured on the outlines at the knots of the arms, straight between them. */
+function outlinesAlong(
+  model: CantileverModel,
+  sections: HaunchedSections,
+  measure: (outline: Outline) => number,
+): Float64Array {
+  const atKnots = sections.atKnots.map((at) => at.map(({ outline }) => measure(outline)));
+  const midspan = measure(sections.midspan.outline);
   return model.way.map((way, i) => {
     const at = atKnots[model.armAt[i]!];
     if (!at) return midspan;
