@@ -109,6 +109,17 @@ describe('cantileverBox with end spans that are too short to balance', () => {
     expect(use(ballast / 2)).toBeGreaterThan(1);
   });
 
+  it('refuses more gravel than the cells of the end span hold, by hand', () => {
+    const { checks, figures, task } = cantileverBox.size({ ...short, ballastKNm: [400, 0, 400] });
+    const room = checks.find(({ id }) => id === 'ballast-room')!;
+    expect(room.demand).toBeCloseTo((400 * 40) / 18, 6);
+    // Height inside grows from midspan to the pier by about 0.37 of what the haunch adds over 36.8 m; width from the webs.
+    const inner = figures['boxInnerHeightM']!;
+    expect(room.capacity).toBeGreaterThan(inner * 0.5 * figures['webSpacingM']! * 40);
+    expect(room.capacity).toBeLessThan((inner + 4) * task.deck.widthM * 40);
+    expect(room.utilisation).toBeGreaterThan(1);
+  });
+
   it('leaves nothing of the main span to falsework', () => {
     expect(bare.figures['onFalseworkM']).toBeCloseTo(2 * 3.2, 6);
     expect(bare.figures['heldArmM']).toBeCloseTo(13.2, 6);
