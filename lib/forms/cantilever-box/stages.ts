@@ -85,20 +85,21 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   const freeKNm = new Float64Array(n);
   const armOf = Array.from({ length: n - 1 }, (_, e) => armWith(arms, (beam.xM[e]! + beam.xM[e + 1]!) / 2));
   for (let i = 0; i < n; i++) {
-    const arm = armOf[i] ?? armOf[i - 1];
-    if (!arm) continue;
-    const { fromPierM, momentKNm } = freeArm(arm, arm.armM);
-    freeKNm[i] = read(fromPierM, momentKNm, Math.abs(beam.xM[i]! - arm.pierM));
+    const k = armOf[i] ?? -1;
+    if (k < 0) continue;
+    const { fromPierM, momentKNm } = free[k]!;
+    freeKNm[i] = read(fromPierM, momentKNm, Math.abs(beam.xM[i]! - arms[k]!.pierM));
   }
   /** Shear of the free arm just left or right of a station. */
   const freeShear = (i: number, side: 'shearLeftKN' | 'shearRightKN'): number => {
-    const arm = armOf[side === 'shearLeftKN' ? i - 1 : i];
-    if (!arm) return 0;
-    const { fromPierM, shearKN } = freeArm(arm, arm.armM);
+    const k = armOf[side === 'shearLeftKN' ? i - 1 : i] ?? -1;
+    if (k < 0) return 0;
+    const { fromPierM, shearKN } = free[k]!;
+    const arm = arms[k]!;
     return arm.side * read(fromPierM, shearKN, Math.abs(beam.xM[i]! - arm.pierM));
   };
   const late = new Float64Array(n - 1);
-  for (let e = 0; e < n - 1; e++) if (!armOf[e]) late[e] = (loadKNm[e]! + loadKNm[e + 1]!) / 2;
+  for (let e = 0; e < n - 1; e++) if (armOf[e] === -1) late[e] = (loadKNm[e]! + loadKNm[e + 1]!) / 2;
   const diaphragms = supportsM.map((_, j) =>
     diaphragmM3(sections.pierAt.get(j) ?? sections.ends[j === 0 ? 0 : 1], sections.pierAt.has(j)),
   );
@@ -140,7 +141,10 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   });
   const { ownShare } = cantileverData.imbalance;
   // A pier is on its own until the span of its shorter arm is joined.
-  const onPier = arms.map((arm) => ({ arm, at: freeArm(arm, arm.balancedM) }));
+  const onPier = arms.map((arm, k) => ({
+    arm,
+    at: arm.armM > arm.balancedM ? freeArm(arm, arm.balancedM) : free[k]!,
+  }));
   const unbalancedKNm = Math.max(
     0,
     ...onPier.map(({ arm, at }, k) => {
@@ -169,9 +173,9 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   };
 }
 
-/** The arm that is cantilevered over `xM`, if any. */
-function armWith(arms: readonly Arm[], xM: number): Arm | undefined {
-  return arms.find(({ pierM, side, armM }) => {
+/** Place of the arm that is cantilevered over `xM`, -1 where there is none. */
+function armWith(arms: readonly Arm[], xM: number): number {
+  return arms.findIndex(({ pierM, side, armM }) => {
     const away = side * (xM - pierM);
     return away >= 0 && away <= armM;
   });
