@@ -105,13 +105,15 @@ function staggeredTop(
   const table = cantileverData.pierTableM.value / 2;
   for (let k = 0; k < arms.length; k += 2) {
     const alike = Math.abs(arms[k]!.armM - arms[k + 1]!.armM) < 1e-9;
-    const both = [towardsPier(model, arms[k]!), towardsPier(model, arms[k + 1]!)];
+    const both = (): Side[] => [towardsPier(model, arms[k]!), towardsPier(model, arms[k + 1]!)];
     const together = (): Side =>
       // With unlike arms in the deck the middle of a span is asked from both of its piers, else from the one it is counted to.
       model.anchors.length > 0
-        ? both.flat().sort((a, b) => b.away - a.away)
+        ? both()
+            .flat()
+            .sort((a, b) => b.away - a.away)
         : model.towardsPiers.get(arms[k]!.support)!;
-    const sides = alike ? [together()] : both;
+    const sides = alike ? [together()] : both();
     sides.forEach((side, s) => {
       const { armM } = arms[k + s]!;
       let most = 0;

@@ -108,16 +108,15 @@ function numbersOf(s: BoxSection): Numbers {
 export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses): HaunchedSections {
   const { layout, task, beam, depthsM, arms } = model;
   const last = task.spansM.length - 1;
-  const middles = task.spansM.map((_, span) => {
-    const { webM, bottomM } = middleOf(t, span);
-    return boxSection(layout, task.depthM, webM, bottomM);
-  });
-  const midspan = t.holding.every((own) => own !== null)
-    ? middles[0]!
-    : middles[t.holding.findIndex((own) => own === null)]!;
+  const common = boxSection(layout, task.depthM, t.webM, t.bottomM);
+  const middles = t.holding.map((own) =>
+    own ? boxSection(layout, task.depthM, own.webM, own.bottomM) : common,
+  );
   const endOf = (span: number): BoxSection =>
     boxSection(layout, task.depthM, t.supportWebM, middleOf(t, span).bottomM);
-  const ends = [endOf(0), endOf(last)] as const;
+  const first = endOf(0);
+  // The same at both ends where neither span holds an arm down.
+  const ends = [first, t.holding[0] || t.holding[last] ? endOf(last) : first] as const;
   const pierAt = new Map<number, BoxSection>();
   const made = new Map<
     string,
@@ -163,7 +162,7 @@ export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses)
   }
   const deepest = [...pierAt.values()].reduce((a, b) => (b.depthM > a.depthM ? b : a), ends[0]);
   return {
-    midspan,
+    midspan: common,
     innerM: Math.max(0, Math.min(...middles.map(({ outline }) => outline.innerM))),
     pier: deepest,
     pierAt,
