@@ -2,6 +2,7 @@ import { described, type At, type Descriptor } from '../model/index.ts';
 import { factDictionary } from '../rules/index.ts';
 import { asIs, fact, factOf, factsOf } from './factFigure.ts';
 import { methodFactFigures } from './methodFactFigures.ts';
+import { regradingFactFigures } from './regradingFigures.ts';
 import { riverFactFigures } from './riverFactFigures.ts';
 import { supportFactFigures } from './supportFactFigures.ts';
 import { mainUnit, spansOf } from './workOption.ts';
@@ -173,6 +174,7 @@ export const factFigures: readonly Descriptor[] = [
   ...supportFactFigures,
   ...riverFactFigures,
   ...methodFactFigures,
+  ...regradingFactFigures,
   asIs('haulLengthM', () => ({ given: 'brief/access/haulLengthM' })),
   asIs('haulMassT', () => ({ given: 'brief/access/haulMassT' })),
   {

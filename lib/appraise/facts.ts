@@ -4,6 +4,7 @@ import { quantitiesOf } from '../takeoff/index.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 import { curveFacts } from './curveFacts.ts';
 import { crossedFacts, methodFacts } from './methodFacts.ts';
+import { regradingFacts } from './regradingFacts.ts';
 import { riverFacts } from './riverFacts.ts';
 import { supportFacts } from './supportFacts.ts';
 import { mainUnit, spansOf } from './workOption.ts';
@@ -119,6 +120,7 @@ export function optionFacts(
     ...supportFacts(site, option),
     ...riverFacts(site, option),
     ...methodFacts(site, option, study.brief),
+    ...regradingFacts(site, option),
     falseworkHeightM: option.method === 'falsework' ? falseworkHeightM(site, option, main) : 0,
     haunched: design.depthM.support !== design.depthM.midspan,
     prestressed: quantitiesOf(design.lines).prestressKg > 0,

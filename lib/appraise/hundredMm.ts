@@ -8,8 +8,9 @@ import type { Workbench } from './workbench.ts';
 const DEEPER_M = 0.1;
 
 /**
- * What 100 mm more of construction depth does to the approaches of a worked option, at mean rates: fill, walls and money.
- * 0 where both ends are fixed or nothing decides the level; null where no road clears with it.
+ * What 100 mm more of construction depth does to the approaches of a worked option, at mean rates: fill, walls and money,
+ * with the regrading behind fixed ends in the money. 0 where nothing decides the level, or both ends are fixed and nothing
+ * is known of the road behind them; null where no road clears with it.
  */
 export function hundredMm(
   { site, costOf }: Pick<Workbench, 'site' | 'costOf'>,

@@ -31,6 +31,25 @@ export const hundredMmFigures: readonly Descriptor[] = [
   measured('wallM2', 'retaining walls of the approaches for 100 mm of depth', 'm2'),
   described({
     path: path('amount'),
+    when: (at) => at.option.profile.regrading !== undefined,
+    label: 'price of 100 mm of depth, approaches',
+    unit: (at: At) => at.study.books.currency,
+    method: 'worked out again',
+    formula:
+      'lines of the approaches and of the regrading behind fixed ends at mean rates, with a deck 100 mm deeper less as it is',
+    inputs: (at) => ({
+      fill: `${at.root}/hundredMm/fillM3`,
+      face: `${at.root}/hundredMm/wallM2`,
+      curves: ['start', 'end'].flatMap((end) =>
+        at.option.profile.regrading?.[end as 'start' | 'end']
+          ? [`${at.root}/profile/regrading/${end}/lengthM`]
+          : [],
+      ),
+      rates: ['fill', 'excavation', 'surfacing', 'parapet'].map(rate),
+    }),
+  }),
+  described({
+    path: path('amount'),
     label: 'price of 100 mm of depth, approaches',
     unit: (at: At) => at.study.books.currency,
     method: 'product',

@@ -1,6 +1,7 @@
 import { described, type At, type Descriptor, type Site } from '../model/index.ts';
 import { roadLevelAt, type DepthAlong } from '../site/index.ts';
 import { depthAt } from '../site/depthAlong.ts';
+import { regradingFigures } from './regradingFigures.ts';
 import { depthAlong } from './workOption.ts';
 
 /** A clearance that the soffit touches, and where. */
@@ -197,9 +198,12 @@ const pieces = (Object.keys(pieceFields) as (keyof typeof pieceFields)[]).map((f
     formula: (at) => {
       const { startM, endM } = at.appraisal.site;
       const piece = at.option.profile.pieces[at.index('piece')]!;
+      const isFixed = fixed(at, piece.fromM < startM ? 'start' : 'end');
       return piece.fromM >= startM && piece.toM <= endM
         ? 'between the abutments: straight, or over the crest that their levels leave room for'
-        : 'approach: tangent at the abutment, over a crest to the limiting gradient, through a sag to the ground or the tie-in';
+        : isFixed
+          ? 'regraded existing road: tangent at the abutment, through a curve past the gradient of the road and a curve back onto it'
+          : 'approach: tangent at the abutment, over a crest to the limiting gradient, through a sag to the ground or the tie-in';
     },
     inputs: (at) => ({
       levels: ends.map((end) => `${at.root}/profile/${end}LevelM`),
@@ -302,6 +306,7 @@ export const roadFigures: readonly Descriptor[] = [
   ...crest,
   ...pieces,
   ...approaches,
+  ...regradingFigures,
   described({
     path: 'options/:option/profile/addedFillM3',
     label: 'fill of the approaches over that of the proposed road',

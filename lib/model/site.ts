@@ -118,6 +118,34 @@ export interface Approach {
   readonly wallM2: number;
 }
 
+/**
+ * How the existing road behind a fixed end is led from the gradient of the deck back to its own line: a curve at the
+ * abutment that turns a little past the gradient of the road, and a curve the other way in which it meets it.
+ */
+export interface Regrading {
+  /** The curve at the abutment: a crest where the road behind falls away more steeply than the deck, else a sag. */
+  readonly kind: 'crest' | 'sag';
+  /** Its radius, m. */
+  readonly radiusM: number;
+  /** Between the gradient of the deck at the abutment and that of the existing road, as a ratio, 0 or more. */
+  readonly gradientChange: number;
+  /** Curve behind the abutment, R x change of gradient, m: until the road runs parallel to the existing one. */
+  readonly curveM: number;
+  /** Half of it, the tangent length, m, and how far the curve lies from where its tangents meet, T^2 / 2R, m. */
+  readonly tangentM: number;
+  readonly offsetM: number;
+  /** Greatest height above the existing road, or depth below it, m: at the end of that curve. */
+  readonly apartM: number;
+  /** Length over which the existing road is regraded until it is met again, m. */
+  readonly lengthM: number;
+  /** Whether it is met again within the steepest gradient; else only the curve is laid and measured. */
+  readonly comesBack: boolean;
+  /** Fill above and cut below the existing road, m3, and walls, both sides together, m2. */
+  readonly fillM3: number;
+  readonly cutM3: number;
+  readonly wallM2: number;
+}
+
 /** Finished road level along the crossing and its approaches for one construction depth. */
 export interface RoadProfile {
   /** Level at both ends of the crossing, m: at the abutments, where they have no windows. */
@@ -134,7 +162,12 @@ export interface RoadProfile {
   readonly steepestGradient: number;
   /** Radius of the crest between the abutments, m; null where the road runs straight. */
   readonly crestRadiusM: number | null;
-  /** In order of chainage without gaps: the approach of each free end, and the road between the abutments. */
+  /**
+   * In order of chainage without gaps: the approach of each free end, the regrading behind a fixed one, and the road
+   * between the abutments.
+   */
   readonly pieces: readonly RoadPiece[];
   readonly approaches: { readonly start: Approach; readonly end: Approach };
+  /** Behind each fixed end where the gradient of the existing road is known; absent where there is none such. */
+  readonly regrading?: { readonly start?: Regrading; readonly end?: Regrading };
 }

@@ -90,9 +90,18 @@ export interface Road {
    */
   readonly startTieIn: TieIn;
   readonly endTieIn: TieIn;
-  /** Length of the approach behind each abutment, m: where a fixed tie-in lies, or how far one that moves may reach. */
+  /**
+   * Length of the approach behind each abutment, m: where a fixed tie-in lies, how far one that moves may reach, or how
+   * much of the existing road behind a fixed end may be regraded.
+   */
   readonly startApproachM: number | Unknown;
   readonly endApproachM: number | Unknown;
+  /**
+   * Gradient of the existing road behind a fixed end, as a ratio, rising with the chainage. Absent or unknown: nothing is
+   * said about the change of gradient there.
+   */
+  readonly startGradient?: number | Unknown;
+  readonly endGradient?: number | Unknown;
   /** Whether the fill of the approaches runs out in side slopes or stands between retaining walls. */
   readonly approachSides: ApproachSides;
 }

@@ -99,7 +99,11 @@ export function measured(
 }
 
 /** An approach as pieces of the road, in order of chainage. */
-export function approachPieces(site: Site, end: RoadEnd, { stretches }: ApproachLine): RoadPiece[] {
+export function approachPieces(
+  site: Site,
+  end: RoadEnd,
+  { stretches }: Pick<ApproachLine, 'stretches'>,
+): RoadPiece[] {
   const at = roadEndsOf(site)[`${end}M`];
   let innerM = 0;
   const pieces = stretches.map(({ lengthM, levelM, fall, bend1PerM }): RoadPiece => {

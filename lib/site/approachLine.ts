@@ -42,7 +42,7 @@ function along(stretch: Outward, atM: number): Reached {
 }
 
 /** Strings stretches of given lengths and bends together from a level and a fall; those without length are left out. */
-function strung(
+export function strung(
   levelM: number,
   parts: readonly { readonly fall: number; readonly lengthM: number; readonly bend1PerM: number }[],
 ): Outward[] {
@@ -57,11 +57,11 @@ function strung(
   return out;
 }
 
-const lengthOf = (stretches: readonly Outward[]): number =>
+export const lengthOf = (stretches: readonly Outward[]): number =>
   stretches.reduce((sum, { lengthM }) => sum + lengthM, 0);
 
 /** Bend of a curve, 1/m; where gradients meet at an angle there is no curve to bend. */
-const bendOf = (radiusM: number): number => (radiusM > 0 ? 1 / radiusM : 0);
+export const bendOf = (radiusM: number): number => (radiusM > 0 ? 1 / radiusM : 0);
 
 /** First distance at which a value that begins above 0 has come down to it, by steps and halving; null where it never does. */
 function firstDown(mostM: number, value: (at: number) => number): number | null {

@@ -246,6 +246,13 @@ export const siteFigures: readonly Descriptor[] = [
       'm',
     ),
   ),
+  ...(['start', 'end'] as const).map((end) =>
+    copied(
+      `site/road/${end}Gradient`,
+      () => `brief/road/${end}Gradient`,
+      `gradient of the existing road behind the ${end}`,
+    ),
+  ),
   ...curve('crest'),
   ...curve('sag'),
   ...(['site', 'options/:option'] as const).map((root) =>

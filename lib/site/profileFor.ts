@@ -17,6 +17,7 @@ import { groundAt } from './lookups.ts';
 import { hasRoad, lowestEnds, type Layout } from './lowestEnds.ts';
 import { decidingNeeds, needsOf, type Need } from './needs.ts';
 import { pieceGradientAt } from './roadLevelAt.ts';
+import { regradingOf } from './regrading.ts';
 import { roadEndsOf } from './standBetween.ts';
 
 /** Why no road line fits, and the smallest ways out. */
@@ -149,11 +150,16 @@ function profileOn(site: Site, crest: Crest): RoadProfile {
   const ends = approachEnds(site);
   const level = { start: crest.levelM, end: crest.endLevelM };
   const side = (end: RoadEnd) => {
-    // A road that cannot move stays as it is beyond the crossing, whatever the bridge does.
-    if (isFixed(site, end)) return { pieces: [], approach: ends[end].proposed };
     const gradient = end === 'start' ? crest.before : crest.after;
+    if (isFixed(site, end)) {
+      // A road that cannot move stays as it is beyond the crossing but for what leads its gradient back.
+      const behind = regradingOf(site, end, gradient);
+      const pieces = behind?.pieces ?? [];
+      return { pieces, approach: ends[end].proposed, regrading: behind?.regrading };
+    }
     const line = approachFrom(ends[end], level[end], outwardFall(end, gradient));
-    return { pieces: approachPieces(site, end, line), approach: measured(site, ends[end], line) };
+    const pieces = approachPieces(site, end, line);
+    return { pieces, approach: measured(site, ends[end], line), regrading: undefined };
   };
   const start = side('start');
   const end = side('end');
@@ -176,6 +182,14 @@ function profileOn(site: Site, crest: Crest): RoadProfile {
     crestRadiusM: Number.isFinite(crest.radiusM) ? crest.radiusM : null,
     pieces: [...start.pieces, ...middle, ...end.pieces],
     approaches,
+    ...(start.regrading || end.regrading
+      ? {
+          regrading: {
+            ...(start.regrading && { start: start.regrading }),
+            ...(end.regrading && { end: end.regrading }),
+          },
+        }
+      : {}),
   };
 }
 
@@ -205,7 +219,7 @@ export function proposedProfile(site: Site): RoadProfile {
  * gradient over level ground is least. Between such ends the crest is as flat as the limits allow. A fixed end keeps its
  * level; a free one may rise by `road.mayRiseM`, never falls below its proposed level and takes its approach along:
  * tangent at the abutment, over a crest to the limiting gradient and through a sag to the ground, or at one gradient to a
- * tie-in that stays. Gradients stay within `road.maxGradient` and curves within `roadCurves` everywhere.
+ * tie-in that stays. Behind a fixed end whose road has a known gradient the existing road is regraded. Gradients stay within `road.maxGradient` and curves within `roadCurves` everywhere.
  *
  * When no line fits, the refusal names the limit, by how much it is missed (the smallest relaxation of headroom or depth)
  * and the rise that would do. Throws RangeError on a depth that is not a positive number.

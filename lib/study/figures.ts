@@ -102,6 +102,7 @@ export const studyFigures: readonly Descriptor[] = [
   ...(['start', 'end'] as const).flatMap((end) => [
     typed(`brief/road/${end}TieIn`, `tie-in of the road behind the ${end}`, '', typedOrPreset),
     typed(`brief/road/${end}ApproachM`, `length of the ${end} approach`, 'm'),
+    typed(`brief/road/${end}Gradient`, `gradient of the existing road behind the ${end}`),
   ]),
   typed('brief/road/approachSides', 'sides of the approaches', '', typedOrPreset),
   typed('brief/deck/:i/kind', (at) => `kind of strip ${at.index('i') + 1}`),

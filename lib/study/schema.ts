@@ -64,6 +64,8 @@ const road = z.strictObject({
   endTieIn: z.enum(tieIns).default('moves'),
   startApproachM: orUnknown(z.number().positive().max(5000)).default('unknown'),
   endApproachM: orUnknown(z.number().positive().max(5000)).default('unknown'),
+  startGradient: orUnknown(z.number().min(-0.25).max(0.25)).exactOptional(),
+  endGradient: orUnknown(z.number().min(-0.25).max(0.25)).exactOptional(),
   approachSides: z.enum(approachSidesKinds).default('slopes'),
 });
 

@@ -1,4 +1,4 @@
-import type { MeasuredLine, RoadProfile, Site } from '../model/index.ts';
+import type { MeasuredLine, Regrading, RoadProfile, Site } from '../model/index.ts';
 import { roadEndsOf } from '../site/index.ts';
 import { substructureData } from '../substructure/data.ts';
 import { furnitureOver } from './furnitureLines.ts';
@@ -8,7 +8,8 @@ import { furnitureOver } from './furnitureLines.ts';
  * the road of the option over the ground. Walls are made like the wings of the abutments, by their face: a stem of mean
  * thickness and a footing as wide as a share of the height. Where an abutment stands inside the crossing, the road from
  * there to the end of the crossing has surfacing and edges on the fill as it would have on the deck, so that bridges of
- * any length are paid for over the same road.
+ * any length are paid for over the same road. An existing road that is regraded behind a fixed end is filled or dug away,
+ * held by walls where the approaches are, and surfaced and edged anew.
  */
 export function approachLines(site: Site, profile: RoadProfile): MeasuredLine[] {
   const { road } = site;
@@ -24,7 +25,8 @@ export function approachLines(site: Site, profile: RoadProfile): MeasuredLine[] 
       how: `${long}, ${sides}`,
     };
     const lines = wallM2 > 0 ? [fill, ...wallLines(`${end} approach`, wallM2)] : [fill];
-    return [...lines, ...roadLines(site, end)];
+    const behind = profile.regrading?.[end];
+    return [...lines, ...roadLines(site, end), ...(behind ? regradingLines(site, end, behind) : [])];
   });
 }
 
@@ -45,6 +47,29 @@ function wallLines(where: string, faceM2: number): MeasuredLine[] {
     line('reinforcement', stemM3 * abutment.barsKgM3, 'walls', `${abutment.barsKgM3} kg/m3`),
     line('footing-concrete', footingM3, 'wall footings', 'by height'),
     line('reinforcement', footingM3 * footing.barsKgM3, 'wall footings', `${footing.barsKgM3} kg/m3`),
+  ];
+}
+
+/** What regrading the existing road behind a fixed end takes. */
+function regradingLines(
+  site: Site,
+  end: 'start' | 'end',
+  { lengthM, fillM3, cutM3, wallM2 }: Regrading,
+): MeasuredLine[] {
+  if (!(lengthM > 0)) return [];
+  const what = `${end} regrading`;
+  const how = `${lengthM.toFixed(0)} m of the existing road, against its line`;
+  const earth = (item: string, quantity: number): MeasuredLine[] =>
+    quantity > 0 ? [{ part: 'approaches', item, quantity, what, how }] : [];
+  return [
+    ...earth('fill', fillM3),
+    ...earth('excavation', cutM3),
+    ...(wallM2 > 0 ? wallLines(what, wallM2) : []),
+    ...furnitureOver(lengthM, site.deck.widthM).map((line): MeasuredLine => ({
+      ...line,
+      part: 'approaches',
+      what: `${what}, ${line.what}`,
+    })),
   ];
 }
 

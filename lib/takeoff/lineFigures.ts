@@ -66,10 +66,10 @@ function possession(at: At) {
 
 type End = 'start' | 'end';
 
-/** Lines of one approach: its fill, and what its walls are made of, from their face. */
-const approach = (end: End): Descriptor[] => {
-  const of = (ending: string) => crossing((what) => what === `${end} approach${ending}`);
-  const face = (at: At) => ({ face: `${at.root}/profile/approaches/${end}/wallM2` }) as const;
+/** What walls of an approach or of a regrading are made of, from their face. */
+const walls = (name: string, record: string): Descriptor[] => {
+  const of = (ending: string) => crossing((what) => what === `${name}${ending}`);
+  const face = (at: At) => ({ face: `${at.root}/profile/${record}/wallM2` }) as const;
   const data = 'data/substructure';
   const item = (name: string, ending: string) => (at: At) => of(ending)(at) && lineOf(at).item === name;
   const concrete = (at: At, name: string): string => {
@@ -78,36 +78,6 @@ const approach = (end: End): Descriptor[] => {
     return `${at.root}/lines/${line}/quantity`;
   };
   return [
-    described({
-      path,
-      when: of(''),
-      label,
-      unit,
-      method: 'as measured',
-      formula: 'fill of the approach, integrated over the ground',
-      inputs: (at) => ({ fill: `${at.root}/profile/approaches/${end}/fillM3` }),
-      compute: ({ fill }) => fill,
-    }),
-    ...(['surfacing', 'parapet'] as const).map((id) =>
-      described({
-        path,
-        when: (at) =>
-          crossing((what) => what.startsWith(`${end} approach road`))(at) && lineOf(at).item === id,
-        label,
-        unit,
-        method: 'product',
-        formula:
-          id === 'surfacing'
-            ? 'length on fill between the abutment and the end of the crossing x deck width'
-            : 'two edges x length on fill between the abutment and the end of the crossing',
-        inputs: (at) => ({
-          outer: `site/${end}M`,
-          abutment: at.ends[end],
-          width: id === 'surfacing' ? ['site/deck/widthM'] : [],
-        }),
-        compute: ({ outer, abutment, width }) => Math.abs(abutment - outer) * (width[0] ?? 2),
-      }),
-    ),
     described({
       path,
       when: item('abutment-concrete', ' walls'),
@@ -152,6 +122,76 @@ const approach = (end: End): Descriptor[] => {
       inputs: (at) => ({ concrete: concrete(at, 'footing-concrete'), bars: `${data}/footing/barsKgM3` }),
       compute: ({ concrete: volume, bars }) => volume * bars,
     }),
+  ];
+};
+
+/** Lines of one approach: its fill, its walls, and the road on the fill inside the crossing. */
+const approach = (end: End): Descriptor[] => [
+  described({
+    path,
+    when: crossing((what) => what === `${end} approach`),
+    label,
+    unit,
+    method: 'as measured',
+    formula: 'fill of the approach, integrated over the ground',
+    inputs: (at) => ({ fill: `${at.root}/profile/approaches/${end}/fillM3` }),
+    compute: ({ fill }) => fill,
+  }),
+  ...(['surfacing', 'parapet'] as const).map((id) =>
+    described({
+      path,
+      when: (at) => crossing((what) => what.startsWith(`${end} approach road`))(at) && lineOf(at).item === id,
+      label,
+      unit,
+      method: 'product',
+      formula:
+        id === 'surfacing'
+          ? 'length on fill between the abutment and the end of the crossing x deck width'
+          : 'two edges x length on fill between the abutment and the end of the crossing',
+      inputs: (at) => ({
+        outer: `site/${end}M`,
+        abutment: at.ends[end],
+        width: id === 'surfacing' ? ['site/deck/widthM'] : [],
+      }),
+      compute: ({ outer, abutment, width }) => Math.abs(abutment - outer) * (width[0] ?? 2),
+    }),
+  ),
+  ...walls(`${end} approach`, `approaches/${end}`),
+];
+
+/** Lines of the regrading of the existing road behind a fixed end. */
+const regrading = (end: End): Descriptor[] => {
+  const name = `${end} regrading`;
+  const behind = (at: At, field: string): string => `${at.root}/profile/regrading/${end}/${field}`;
+  return [
+    ...(['fill', 'excavation'] as const).map((id) =>
+      described({
+        path,
+        when: (at) => crossing((what) => what === name)(at) && lineOf(at).item === id,
+        label,
+        unit,
+        method: 'as measured',
+        formula: 'between the regraded and the existing road',
+        inputs: (at) => ({ volume: behind(at, id === 'fill' ? 'fillM3' : 'cutM3') }),
+        compute: ({ volume }) => volume,
+      }),
+    ),
+    ...(['surfacing', 'parapet'] as const).map((id) =>
+      described({
+        path,
+        when: (at) => crossing((what) => what.startsWith(`${name}, `))(at) && lineOf(at).item === id,
+        label,
+        unit,
+        method: 'product',
+        formula: id === 'surfacing' ? 'length regraded x deck width' : 'two edges x length regraded',
+        inputs: (at) => ({
+          length: behind(at, 'lengthM'),
+          width: id === 'surfacing' ? ['site/deck/widthM'] : [],
+        }),
+        compute: ({ length, width }) => length * (width[0] ?? 2),
+      }),
+    ),
+    ...walls(name, `regrading/${end}`),
   ];
 };
 
@@ -204,6 +244,8 @@ export const lineFigures: readonly Descriptor[] = [
   }),
   ...approach('start'),
   ...approach('end'),
+  ...regrading('start'),
+  ...regrading('end'),
   described({
     path,
     when: isItem('rail-possession'),

@@ -20,6 +20,30 @@ export function roadWords(option: AppraisedOption): HtmlChild {
     ' m at the start and ',
     figure('approaches/end/lengthM', fixed(approaches.end.lengthM, 0)),
     ' m at the end to meet the ground, which is taken as level beyond the survey.',
+    (['start', 'end'] as const).map((end) => behindWords(option, end)),
+  ];
+}
+
+/** How the gradient of the deck is led back to that of the existing road behind a fixed end. */
+function behindWords(option: AppraisedOption, end: 'start' | 'end'): HtmlChild {
+  const behind = option.profile.regrading?.[end];
+  if (behind === undefined) return null;
+  const { kind, curveM, radiusM, gradientChange, apartM, lengthM, comesBack } = behind;
+  const figure = (field: string, text: string): HTMLElement =>
+    workedFigure(ofOption(option, `profile/regrading/${end}/${field}`), text);
+  if (!(lengthM > 0)) return ` Behind the ${end} the existing road goes on without a curve.`;
+  return [
+    ` Behind the ${end} the gradient changes by `,
+    figure('gradientChange', fixed(100 * gradientChange, 1)),
+    ` %: a ${kind} of `,
+    figure('radiusM', radiusText(radiusM)),
+    ' m radius takes a curve behind the abutment of ',
+    figure('curveM', fixed(curveM, 0)),
+    ` m, at whose end the road lies ${kind === 'crest' ? 'above' : 'below'} the existing one by `,
+    figure('apartM', fixed(apartM, 2)),
+    comesBack
+      ? [' m; it is met again after ', figure('lengthM', fixed(lengthM, 0)), ' m.']
+      : ' m; it is not met again within the steepest gradient.',
   ];
 }
 

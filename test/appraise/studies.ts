@@ -18,7 +18,9 @@ export function mirrored(study: Study): Study {
     fromM: turn(s.toM),
     toM: turn(s.fromM),
   });
-  const { road } = brief;
+  const { startGradient: _start, endGradient: _end, ...road } = brief.road;
+  const back = (gradient: number | 'unknown'): number | 'unknown' =>
+    gradient === 'unknown' ? gradient : -gradient;
   return {
     ...study,
     brief: {
@@ -32,6 +34,12 @@ export function mirrored(study: Study): Study {
         startLevelM: road.endLevelM,
         endLevelM: road.startLevelM,
         fixedEnd: road.fixedEnd === 'start' ? 'end' : road.fixedEnd === 'end' ? 'start' : road.fixedEnd,
+        startTieIn: road.endTieIn,
+        endTieIn: road.startTieIn,
+        startApproachM: road.endApproachM,
+        endApproachM: road.startApproachM,
+        ...(brief.road.endGradient === undefined ? {} : { startGradient: back(brief.road.endGradient) }),
+        ...(brief.road.startGradient === undefined ? {} : { endGradient: back(brief.road.startGradient) }),
       },
       deck: [...brief.deck].reverse(),
       obstacles: brief.obstacles.map((o) => ({

@@ -248,7 +248,7 @@ export const inWindows = (): Context =>
       brief: {
         ...brief,
         crossing: { ...brief.crossing, startLatestM: 1264, endEarliestM: 1430 },
-        road: { ...brief.road, fixedEnd: 'start', approachSides: 'walls' },
+        road: { ...brief.road, fixedEnd: 'start', startGradient: 0.03, approachSides: 'walls' },
         waters: brief.waters.map((water) => ({ ...water, flowM3s: 420, allowedAffluxM: 0.2 })),
       },
       books: { ...books, draws: 300 },

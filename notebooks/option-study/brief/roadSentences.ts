@@ -1,6 +1,6 @@
 import type { Road, Study } from '../../../lib/index.ts';
 import type { HtmlChild } from '../../html.ts';
-import type { Path } from '../../page/index.ts';
+import { putAt, type Made, type Path } from '../../page/index.ts';
 import { approachSideChoices, fixedEndChoices, loadingChoices, tieInChoices } from './briefChoices.ts';
 import { place, type InWords } from './inWords.ts';
 
@@ -64,6 +64,18 @@ export function waterSentence({ fields, height }: InWords, { brief }: Study, ind
   ];
 }
 
+type End = 'start' | 'end';
+
+/** Gradient of the existing road behind an end, rising with the chainage. */
+const held = (road: Road, end: End): number | 'unknown' => road[`${end}Gradient`] ?? 'unknown';
+
+const heldFigure = (end: End): Made<number | 'unknown'> => ({
+  key: `brief.road.${end}Gradient`,
+  get: ({ brief }) => held(brief.road, end),
+  put: (study, value) => putAt(study, ['brief', 'road'], { ...study.brief.road, [`${end}Gradient`]: value }),
+  owns: [['brief', 'road', `${end}Gradient`]],
+});
+
 /** What the words about the road hang on besides its figures. */
 export const roadShape = (road: Road): unknown => [
   road.crestRadiusM === 'unknown',
@@ -72,6 +84,8 @@ export const roadShape = (road: Road): unknown => [
   road.endTieIn,
   road.startApproachM === 'unknown',
   road.endApproachM === 'unknown',
+  held(road, 'start') === 'unknown',
+  held(road, 'end') === 'unknown',
 ];
 
 /** A least radius, which follows from the design speed until it is given. */
@@ -92,12 +106,52 @@ const radius = (
     max: { value: 1e6 },
   });
 
-/** How the road is joined to the ground behind each end that may rise, and how its fill is held. */
+/** The existing road behind an end that is fixed, and how much of it may be regraded. */
+function heldSentence(fields: InWords['fields'], road: Road, end: End): HtmlChild {
+  const isKnown = held(road, end) !== 'unknown';
+  return [
+    `Behind the ${end}, which stays, the existing road runs at `,
+    fields.figure(heldFigure(end), {
+      label: `gradient of the existing road behind the ${end}`,
+      places: 1,
+      unit: '%',
+      per: 100,
+      step: 0.5,
+      unknown: 'a gradient that is not known',
+      from: 0,
+      min: { value: -25 },
+      max: { value: 25 },
+    }),
+    isKnown && [
+      ' %, rising with the chainage; ',
+      approachLength(fields, road, end, 'an unknown length'),
+      ' of it may be regraded',
+    ],
+    '. ',
+  ];
+}
+
+/** Length of an approach with its unit, where it is known. */
+const approachLength = (fields: InWords['fields'], road: Road, end: End, unknown: string): HtmlChild => [
+  fields.figure(['brief', 'road', `${end}ApproachM`], {
+    label: `length of the ${end} approach`,
+    places: 0,
+    unit: 'm',
+    step: 10,
+    unknown,
+    from: 150,
+    min: { value: 1 },
+    max: { value: 5000 },
+  }),
+  road[`${end}ApproachM`] !== 'unknown' && ' m',
+];
+
+/** How the road is joined to what lies behind each end, and how its fill is held. */
 export function approachSentence({ fields }: InWords, { brief }: Study): HtmlChild {
   const { road } = brief;
-  const free = (['start', 'end'] as const).filter((end) => road.fixedEnd !== end && road.fixedEnd !== 'both');
   return [
-    free.map((end) => {
+    (['start', 'end'] as const).map((end) => {
+      if (road.fixedEnd === end || road.fixedEnd === 'both') return heldSentence(fields, road, end);
       const stays = road[`${end}TieIn`] === 'fixed';
       return [
         `Behind the ${end} its tie-in `,
@@ -106,17 +160,12 @@ export function approachSentence({ fields }: InWords, { brief }: Study): HtmlChi
           choices: tieInChoices,
         }),
         stays ? (road[`${end}ApproachM`] === 'unknown' ? ' ' : ' at ') : ' within ',
-        fields.figure(['brief', 'road', `${end}ApproachM`], {
-          label: `length of the ${end} approach`,
-          places: 0,
-          unit: 'm',
-          step: 10,
-          unknown: stays ? 'where the proposed road meets the ground' : 'any distance',
-          from: 150,
-          min: { value: 1 },
-          max: { value: 5000 },
-        }),
-        road[`${end}ApproachM`] !== 'unknown' && ' m',
+        approachLength(
+          fields,
+          road,
+          end,
+          stays ? 'where the proposed road meets the ground' : 'any distance',
+        ),
         '. ',
       ];
     }),
