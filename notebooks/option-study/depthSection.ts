@@ -62,7 +62,7 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
             ),
             ', where least is left.',
           ),
-          h('p', {}, roadWords(v.reference)),
+          h('p', {}, roadWords(v.site.road, v.reference)),
           h('p', {}, depthPrice(v.reference, v.books.currency)),
         ],
     }),

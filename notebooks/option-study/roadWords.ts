@@ -1,11 +1,11 @@
 import { ofOption } from '../drawing/asked.ts';
 import { fixed, radiusText } from '../format.ts';
 import type { HtmlChild } from '../html.ts';
-import type { AppraisedOption } from '../model.ts';
+import type { AppraisedOption, Site } from '../model.ts';
 import { workedFigure } from '../page/index.ts';
 
-/** How the road runs over the bridge, and how far it reaches behind it. */
-export function roadWords(option: AppraisedOption): HtmlChild {
+/** How the road runs over the bridge, how far it reaches behind it, and how it goes on behind an end that is fixed. */
+export function roadWords({ fixedEnd }: Site['road'], option: AppraisedOption): HtmlChild {
   const { crestRadiusM, steepestGradient, approaches } = option.profile;
   const figure = (field: string, text: string): HTMLElement =>
     workedFigure(ofOption(option, `profile/${field}`), text);
@@ -20,14 +20,17 @@ export function roadWords(option: AppraisedOption): HtmlChild {
     ' m at the start and ',
     figure('approaches/end/lengthM', fixed(approaches.end.lengthM, 0)),
     ' m at the end to meet the ground, which is taken as level beyond the survey.',
-    (['start', 'end'] as const).map((end) => behindWords(option, end)),
+    (['start', 'end'] as const).map(
+      (end) => (fixedEnd === end || fixedEnd === 'both') && behindWords(option, end),
+    ),
   ];
 }
 
 /** How the gradient of the deck is led back to that of the existing road behind a fixed end. */
 function behindWords(option: AppraisedOption, end: 'start' | 'end'): HtmlChild {
   const behind = option.profile.regrading?.[end];
-  if (behind === undefined) return null;
+  if (behind === undefined)
+    return ` The gradient of the existing road behind the ${end}, which stays, is not known: no curve is laid or paid for there.`;
   const { kind, curveM, radiusM, gradientChange, apartM, lengthM, comesBack } = behind;
   const figure = (field: string, text: string): HTMLElement =>
     workedFigure(ofOption(option, `profile/regrading/${end}/${field}`), text);

@@ -45,6 +45,24 @@ const focused = (page: Page): Promise<string | null | undefined> =>
   page.evaluate(() => document.activeElement?.getAttribute('aria-label'));
 
 describe('the brief in prose', () => {
+  it('takes the gradient of the existing road behind a fixed end, and the road is said to curve back to it', async () => {
+    const label = 'gradient of the existing road behind the end, %';
+    const road = (): Promise<string | null> => page.locator('[id="4+010"]').textContent();
+    await reads(page, 'Behind the end, which stays, the existing road runs at a gradient that is not known.');
+    await type(page, label, '2');
+    await page.locator('h1').click();
+    await reads(page, 'runs at 2.0 %, rising with the chainage; an unknown length of it may be regraded.');
+    await page.locator('[id="4+010"]').scrollIntoViewIfNeeded();
+    await expect.poll(road, { timeout: 15_000 }).toMatch(/takes a curve behind the abutment of \d+/u);
+    await type(page, 'length of the end approach, m', '500');
+    await page.locator('h1').click();
+    await reads(page, '; 500 m of it may be regraded.');
+    await undo(page);
+    await undo(page);
+    await reads(page, 'the existing road runs at a gradient that is not known.');
+    await expect.poll(road, { timeout: 15_000 }).toContain('is not known: no curve is laid');
+  });
+
   it('reads as it stands, and follows a choice, an unknown and its undoing', async () => {
     await reads(page, 'from chainage 1240 to 1470, on a straight line, 8° off square.');
     await field(page, 'line in plan').selectOption('curve');
