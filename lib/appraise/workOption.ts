@@ -11,7 +11,14 @@ import type {
 } from '../model/index.ts';
 import { planProgramme } from '../programme/index.ts';
 import { constructionDepth, groundAt, headroomSpare, roadLevelAt, type DepthAlong } from '../site/index.ts';
-import { foundationsCost, placeText, standOneSupport, standSupports } from '../substructure/index.ts';
+import {
+  foundationsCost,
+  placeText,
+  settingAt,
+  standOneSupport,
+  standSupports,
+  strikesAt,
+} from '../substructure/index.ts';
 import { measure } from '../takeoff/index.ts';
 import { remembered } from '../kept.ts';
 import type { DepthTrial } from './leastCostDepth.ts';
@@ -86,7 +93,16 @@ function taskOf(
     ...(module.ignoresHeight
       ? {}
       : { clearUnderM: unit.supportsM.map((x) => Math.round(clear(x) / CLEAR_CLASS_M) * CLEAR_CLASS_M) }),
+    ...(module.wallsInOne ? strikesOn(site, unit) : {}),
   };
+}
+
+/** What may strike the walls between the spans of a unit; the fill stands behind those at its ends. */
+function strikesOn(site: Site, { supportsM }: Unit): Pick<UnitTask, 'strikes'> {
+  const strikes = supportsM.map((x, s) =>
+    s === 0 || s === supportsM.length - 1 ? [] : strikesAt(settingAt(site, x)),
+  );
+  return strikes.some((at) => at.length > 0) ? { strikes } : {};
 }
 
 /**

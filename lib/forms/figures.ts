@@ -85,6 +85,44 @@ export const designFigures: readonly Descriptor[] = [
       road: ['site/road/startLevelM', 'site/road/endLevelM'],
     }),
   }),
+  ...(
+    [
+      [
+        'alongKN',
+        'force along the road of what may strike',
+        'kN',
+        'the nearest vehicle or train; of a vessel a share of its force',
+      ],
+      ['acrossKN', 'force across the road of what may strike', 'kN', 'of a vessel, 120 V sqrt(DWT); else 0'],
+      [
+        'aboveGroundM',
+        'height of what may strike',
+        'm',
+        'of a vehicle or train; of a vessel the water level',
+      ],
+    ] as const
+  ).map(([field, label, measure, formula]) =>
+    described({
+      path: unit(`task/strikes/:s/:k/${field}`),
+      label: (at) => `${label} support ${at.index('s') + 1}${name(at)}`,
+      unit: measure,
+      method: 'what runs or sails within reach of the support',
+      formula,
+      inputs: (at) => ({
+        at: `${at.root}/units/${at.name('unit')}/supportsM/${at.name('s')}`,
+        reach: ['data/substructure/impact/road/reachM', 'data/substructure/impact/railway/reachM'],
+        figures: {
+          alongKN: [
+            'data/substructure/impact/road/forceKN',
+            'data/substructure/impact/railway/forceKN',
+            'data/substructure/vessel/alongShare',
+          ],
+          acrossKN: ['data/substructure/vessel/factor', 'data/substructure/vessel/presetSpeedMs'],
+          aboveGroundM: ['data/substructure/impact/road/heightM', 'data/substructure/impact/railway/heightM'],
+        }[field],
+      }),
+    }),
+  ),
   described({
     path: unit('task/girders'),
     label: `girders asked for`,

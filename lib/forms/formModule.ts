@@ -28,6 +28,8 @@ export interface FormModule {
   readonly joined?: 'after-placing' | 'never';
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
   readonly ignoresHeight?: true;
+  /** Inner supports are walls in one with the deck: `strikes` of its task is read. */
+  readonly wallsInOne?: true;
   /** Strength, lightweight concrete and ballast of its task are read. */
   readonly readsConcrete?: true;
   /** Of the choices of a variant those that the form has. */

@@ -35,6 +35,15 @@ export interface UnitTask {
   readonly pylons?: readonly number[];
   /** Height of the soffit above ground at each support, m, where known (pylon legs, walls, falsework). */
   readonly clearUnderM?: readonly number[];
+  /** Portal frames: what may strike the wall at each support; none when absent. */
+  readonly strikes?: readonly (readonly Strike[])[];
+}
+
+/** A vehicle, train or vessel against a support: characteristic force along and across the road, kN, at a height above ground, m. */
+export interface Strike {
+  readonly alongKN: number;
+  readonly acrossKN: number;
+  readonly aboveGroundM: number;
 }
 
 /** Lightweight concrete of a deck. */
@@ -106,7 +115,7 @@ export interface SupportReaction {
 }
 
 /**
- * A wall in one with the deck at an end of a unit, instead of an abutment: its concrete and bars stand in the lines of the
+ * A wall in one with the deck, instead of an abutment or a pier: its concrete and bars stand in the lines of the
  * design down to the top of its foundation, which is sized for `loads` on every ground.
  */
 export interface IntegralWall {
@@ -125,6 +134,8 @@ export interface IntegralWall {
     readonly verticalKN: number;
     readonly alongKN: number;
     readonly momentKNm: number;
+    /** Accidental: what strikes the wall; its force along is in these loads, that across is not. */
+    readonly struck?: Strike;
   }[];
 }
 

@@ -157,12 +157,14 @@ export const integralFigures: readonly Descriptor[] = [
     label: on('force along the road'),
     unit: 'kN',
     method: 'greatest of the combinations',
-    formula: 'thrust of the frame on its foundation, either way',
+    formula: 'thrust of the frame on its foundation, either way, while nothing strikes it',
     inputs: (at) => {
       const path = wallPath(at)!;
       const { unit, s } = unitsAt(at).find((one) => path.startsWith(one.path))!;
       const wall = at.option.designs[unit]!.walls!.find((one) => one.support === s)!;
-      return { thrust: wall.loads.map((_, k) => `${path}/loads/${k}/alongKN`) };
+      return {
+        thrust: wall.loads.flatMap(({ struck }, k) => (struck ? [] : [`${path}/loads/${k}/alongKN`])),
+      };
     },
     compute: ({ thrust }) => Math.max(...thrust.map(Math.abs)),
   }),

@@ -3,6 +3,7 @@ import { substructureData } from './data.ts';
 import type { SeismicLoad } from './seismicLoad.ts';
 import type { Setting } from './setting.ts';
 import type { SupportAsk } from './supportAsk.ts';
+import { strikesAt } from './strikesAt.ts';
 import { upliftKN } from './supportLines.ts';
 
 /** Ratio of allowable loads under accidental to those under characteristic loads. */
@@ -19,10 +20,7 @@ export function pierCombos(
   bearingLevelM: number,
   own: { readonly weightKN: number; readonly windKN: number; readonly windLevelM: number },
 ): Combo[] {
-  const {
-    factors,
-    vessel: { alongShare },
-  } = substructureData;
+  const { factors } = substructureData;
   const wind = ask.acrossKN + own.windKN;
   const windLevelM =
     wind > 0 ? (ask.acrossKN * bearingLevelM + own.windKN * own.windLevelM) / wind : bearingLevelM;
@@ -69,22 +67,17 @@ export function pierCombos(
       ultimate: 1,
     });
   }
-  if (setting.impact !== null) {
+  for (const { alongKN, acrossKN, aboveGroundM } of strikesAt(setting)) {
+    const levelM = setting.groundLevelM + aboveGroundM;
     combos.push({
       verticalKN: held,
-      alongKN: setting.impact.forceKN,
-      alongLevelM: setting.groundLevelM + setting.impact.heightM,
-      acrossKN: 0,
-      acrossLevelM: bearingLevelM,
+      alongKN,
+      alongLevelM: levelM,
+      acrossKN,
+      acrossLevelM: levelM,
       capacity: accidentalCapacity,
       ultimate: 1,
     });
-  }
-  if (setting.vesselKN !== null && setting.waterLevelM !== null) {
-    const struck = { verticalKN: held, capacity: accidentalCapacity, ultimate: 1 };
-    const level = { alongLevelM: setting.waterLevelM, acrossLevelM: setting.waterLevelM };
-    combos.push({ ...struck, ...level, alongKN: 0, acrossKN: setting.vesselKN });
-    combos.push({ ...struck, ...level, alongKN: alongShare * setting.vesselKN, acrossKN: 0 });
   }
   if (setting.seismic !== null)
     combos.push(...seismicCombos(ask, setting.seismic, bearingLevelM, own.weightKN));

@@ -5,6 +5,7 @@ import { substructureData } from './data.ts';
 import type { FoundationTask } from './foot.ts';
 import { foundationFor } from './foundationFor.ts';
 import { groundUnder } from './groundUnder.ts';
+import { accidentalCapacity } from './pierCombos.ts';
 import { scourDepth, settingAt } from './setting.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import { line, waterAccessLines } from './supportLines.ts';
@@ -13,7 +14,8 @@ import { wingFootingLines, wingsOf, wingWallsLine } from './wings.ts';
 /**
  * A wall in one with the deck: no bearings, no joint. The wall itself stands in the lines of the design; here are, of one at
  * an end, its wings, and on every ground the foundation under it, sized for vertical load, thrust and moment as the frame
- * puts them down, the pressure of the fill in them, with the fill on the heel at an end and wind across.
+ * puts them down, the pressure of the fill in them, with the fill on the heel at an end and wind across. A wall between two
+ * spans may be struck; one at an end has the fill behind it, like any abutment.
  */
 export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWall): Support {
   const { abutment, piles, factors } = substructureData;
@@ -31,14 +33,14 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
     ...(ask.index === undefined ? {} : { support: ask.index }),
     shaftLengthM: wall.footM,
     shaftWidthM: widthM,
-    combos: wall.loads.map(({ verticalKN, alongKN, momentKNm }): Combo => ({
+    combos: wall.loads.map(({ verticalKN, alongKN, momentKNm, struck }): Combo => ({
       verticalKN,
       alongKN,
       alongLevelM: footM,
       momentAlongKNm: momentKNm,
-      acrossKN,
-      acrossLevelM: slabM,
-      capacity: 1,
+      acrossKN: struck ? struck.acrossKN : acrossKN,
+      acrossLevelM: struck ? setting.groundLevelM + struck.aboveGroundM : slabM,
+      capacity: struck ? accidentalCapacity : 1,
       ultimate: 1,
     })),
     groundLevelM: Math.min(setting.groundLevelM, footM + piles.capCoverM),
@@ -78,6 +80,7 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
       acrossKN,
       jointMovementMm: 0,
       tieDownKN: 0,
+      ...(isEnd || setting.vesselKN === null ? {} : { vesselKN: setting.vesselKN }),
     },
     lines: [
       ...(wings

@@ -125,7 +125,7 @@ function askAt(
     ...loads,
     // Fixed points of two units add; sliding bearings of two units push apart, so the larger counts.
     alongKN: integral
-      ? Math.max(...integral.loads.map(({ alongKN }) => Math.abs(alongKN)))
+      ? Math.max(...integral.loads.map(({ alongKN, struck }) => (struck ? 0 : Math.abs(alongKN))))
       : fixed.length > 0
         ? fixed.reduce((sum, { hold }) => sum + hold.alongKN, 0)
         : Math.max(...meetings.map(({ hold }) => hold.alongKN)),

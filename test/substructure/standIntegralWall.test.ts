@@ -1,8 +1,8 @@
 import { expect, it } from 'vitest';
 import { portalFrame } from '../../lib/forms/portal-frame/index.ts';
-import type { Design, MeasuredLine, Support } from '../../lib/model/index.ts';
+import type { Design, MeasuredLine, Support, UnitTask } from '../../lib/model/index.ts';
 import { constructionDepth } from '../../lib/site/index.ts';
-import { standSupports } from '../../lib/substructure/index.ts';
+import { settingAt, standSupports, strikesAt } from '../../lib/substructure/index.ts';
 import { measure } from '../../lib/takeoff/index.ts';
 import { crossing, profile, unitOn } from './crossing.ts';
 
@@ -101,4 +101,39 @@ it('standSupports(frame of two spans) has a wall between them: no wings, no fill
   expect(plan(middle)).toBeLessThan(plan(first));
   const lines = measure(site, [design], supports, profile);
   expect(sum(lines, 'pier-concrete')).toBeCloseTo(design.walls![1]!.concreteM3, 9);
+});
+
+it('standSupports(frame of two spans, struck) takes the blow at half again of what the ground may carry, across as well', () => {
+  const spansM = [12, 12];
+  const frameOf = (strikes?: UnitTask['strikes']): Design =>
+    portalFrame.size({
+      ...frame().task,
+      spansM,
+      clearUnderM: [8.75, 8.75, 8.75],
+      ...(strikes ? { strikes } : {}),
+    });
+  const middle = (design: Design): Support =>
+    standSupports(site, [{ ...unitOn([0, 12, 24]), form: 'portal-frame' }], [design], profile)[1]!;
+  const plan = ({ foundations }: Support): number =>
+    foundations[0]!.footing.lengthM * foundations[0]!.footing.widthM;
+  const free = middle(frameOf());
+  const blow = (alongKN: number, acrossKN: number): Support =>
+    middle(frameOf([[], [{ alongKN, acrossKN, aboveGroundM: 3 }], []]));
+  expect(plan(blow(4000, 0))).toBeGreaterThan(plan(free));
+  expect(plan(blow(0, 12_000))).toBeGreaterThan(plan(free));
+  // By hand, along: a force less than 1.5 times as great as what already goes into the ground asks for no more of it.
+  expect(plan(blow(10, 0))).toBe(plan(free));
+  expect(blow(4000, 0).articulation.alongKN).toBeCloseTo(free.articulation.alongKN, 6);
+});
+
+it('strikesAt() is the vehicle along the road, and the vessel across it or with half of its force along it', () => {
+  const setting = { ...settingAt(site, 12), impact: null, vesselKN: null };
+  expect(strikesAt(setting)).toEqual([]);
+  expect(strikesAt({ ...setting, impact: { forceKN: 1000, heightM: 1.25 } })).toEqual([
+    { alongKN: 1000, acrossKN: 0, aboveGroundM: 1.25 },
+  ]);
+  expect(strikesAt({ ...setting, groundLevelM: -4, waterLevelM: -1, vesselKN: 24_000 })).toEqual([
+    { alongKN: 0, acrossKN: 24_000, aboveGroundM: 3 },
+    { alongKN: 12_000, acrossKN: 0, aboveGroundM: 3 },
+  ]);
 });

@@ -14,7 +14,7 @@ const actions = [
   './task/deck/superimposedKNm',
 ] as const;
 const design =
-  'worst of stiff and soft feet: own weight, superimposed load, fill (least, at rest or K*), temperature, shrinkage, surcharge, traffic of the heaviest metre x width, braking, each where it adds';
+  'worst of stiff and soft feet: own weight, superimposed load, fill (least, at rest or K*), temperature, shrinkage, surcharge, traffic of the heaviest metre x width, braking, each where it adds; or a middle wall struck either way beside permanent loads, fill and half of the temperature, without traffic, factors of 1';
 
 const bending = (id: string, ...own: readonly string[]): Descriptor[] => [
   ...check(
@@ -51,7 +51,22 @@ export const portalChecks: readonly Descriptor[] = [
   ...bending('knee', 'kneeOwnKNm', 'kneeOwnSoftKNm'),
   ...bending('wall', 'kneeOwnKNm', 'kneeOwnSoftKNm'),
   ...bending('wall-inner', 'thrustOwnKN'),
-  ...bending('wall-middle', 'middleOwnKNm', 'middleOwnSoftKNm'),
+  ...bending('wall-middle', 'middleOwnKNm', 'middleOwnSoftKNm', 'middleStruck*'),
+  ...check(
+    'wall-across',
+    [
+      'force of the vessel x its height over the footing, the wall a cantilever',
+      'middleHeightM',
+      'data/substructure/vessel/factor',
+      'data/portal-frame/leg/belowGroundM',
+    ],
+    [
+      'half of the upright bars on a lever of their own, with the weight on the wall',
+      'wallTopM',
+      './task/deck/widthM',
+    ],
+    'EN 1992-1-1 6.1 (from memory)',
+  ),
   ...['shear', 'shear-walls'].flatMap((id) =>
     check(
       id,

@@ -125,6 +125,24 @@ export const portalFigures: readonly Descriptor[] = [
     'plane frame, feet turn freely',
     onSoft,
   ),
+  figure('middleStruckKN', {
+    label: 'greatest force along the road that may strike the middle wall',
+    unit: 'kN',
+    method: 'greatest',
+    formula: 'of vehicles, trains and vessels within reach',
+    inputs: (at) => ({
+      strikes: (at.design.task.strikes![1] ?? []).map((_, k) => `${at.unit}/task/strikes/1/${k}/alongKN`),
+    }),
+    compute: ({ strikes }) => Math.max(...strikes),
+    sources: ['EN 1991-1-7 tables 4.1 and 4.4, AASHTO LRFD 3.14 (from memory)'],
+  }),
+  statics(
+    'middleStruckKNm',
+    'greatest moment of that force alone in the middle wall, its foot on the ground and its head held by the deck',
+    'kNm',
+    'plane frame, the worse of stiff and soft feet',
+    ['middleStruckKN', 'data/portal-frame/foot/stiffKNm3', 'data/portal-frame/foot/softKNm3'],
+  ),
   statics('thrustOwnKN', 'own-weight thrust outwards, stiff feet', 'kN', 'plane frame', onFeet),
   statics(
     'thrustOwnSoftKN',

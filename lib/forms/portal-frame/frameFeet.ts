@@ -1,3 +1,5 @@
+import type { IntegralWall } from '../../model/index.ts';
+import { brakingOf } from './combine.ts';
 import type { FootLoad, FrameModel } from './frameModel.ts';
 import { portalData } from './portalData.ts';
 import type { SizedFrame } from './sizeFrame.ts';
@@ -5,16 +7,23 @@ import type { SizedFrame } from './sizeFrame.ts';
 /**
  * Characteristic loads on the footing of a wall, on stiff and on soft feet: with fill at rest, at its least while the warm
  * deck pushes outwards, as the warm deck presses it (K*), and with a short cold deck and traffic behind the wall; each
- * with the traffic that goes with it. Along and moments are positive towards the span, of a middle wall towards the last.
+ * with the traffic that goes with it. Then braking either way, which all walls share by their stiffness, without what the
+ * fill in front of the deck would take of it; and any wall of the frame struck, without traffic: the deck holds its head
+ * and hands that share on to the other walls. Along and moments are positive towards the span, of a middle wall towards the last.
  */
-export function footLoads(model: FrameModel, { traffic, tendons }: SizedFrame, wall: number): FootLoad[] {
-  const { earth, temperature, shrinkage, cracked, service } = portalData;
+export function footLoads(
+  model: FrameModel,
+  { traffic, tendons }: SizedFrame,
+  wall: number,
+): IntegralWall['loads'] {
+  const { earth, temperature, shrinkage, cracked, service, factors } = portalData;
   const held = model.prestressed ? 1 : cracked.share;
   const perK = (temperature.expansion1PerK / 1e-5) * held;
   const dry = -held * shrinkage.relaxed * (shrinkage.strain / 1e-5);
+  const brakingKN = factors[model.standardId].braking * brakingOf(model);
   const { name } = model.shape.walls[wall]!;
   const ends = name === 'first' ? [0] : name === 'last' ? [1] : [0, 1];
-  return model.cases.flatMap((one, k) => {
+  return model.cases.flatMap((one, k): IntegralWall['loads'] => {
     const inSpans = traffic.feet[k]!.inSpan.map((feet) => feet[wall]!);
     const overWall = traffic.feet[k]!.overWall[wall]![wall]!;
     const base = [
@@ -31,19 +40,45 @@ export function footLoads(model: FrameModel, { traffic, tendons }: SizedFrame, w
     const cold = (share: number): FootLoad =>
       times(one.longer.feet[wall]!, -share * perK * temperature.colderK + dry);
     const beside = service.characteristicTemperature;
+    const braked = bothWays(times(one.braking.feet[wall]!, brakingKN)).flatMap((braking) => {
+      const { inSpan, overWall: over } = traffic.feetBraking[k]!;
+      const above = over[wall]![wall]!;
+      return [
+        ...inSpan.map((feet) => [rest, braking, feet[wall]!]),
+        ...over.map((feet) => [rest, braking, feet[wall]!]),
+        [pressed, warm(beside), braking, above],
+        [rest, cold(beside), braking, above],
+      ];
+    });
+    const struck = (model.task.strikes ?? []).flatMap((strikes, hit) =>
+      strikes.flatMap((strike, n) => {
+        if (hit !== wall && !(strike.alongKN > 0)) return [];
+        const along = one.strikes[hit]![n]!.feet[wall]!;
+        return (strike.alongKN > 0 ? bothWays(along) : [along]).map((load) => ({
+          ...total([...base, rest, load]),
+          struck: hit === wall ? strike : { ...strike, acrossKN: 0 },
+        }));
+      }),
+    );
     return [
-      [rest],
-      ...inSpans.map((inMiddle) => [rest, inMiddle]),
-      [rest, overWall],
-      [least, warm(1)],
-      ...inSpans.map((inMiddle) => [least, warm(beside), inMiddle]),
-      [pressed, warm(1)],
-      [pressed, warm(beside), overWall],
-      ...behind.map((side) => [rest, cold(1), side]),
-      ...behind.map((side) => [rest, cold(beside), side, overWall]),
-    ].map((loads) => total([...base, ...loads]));
+      ...[
+        [rest],
+        ...inSpans.map((inMiddle) => [rest, inMiddle]),
+        [rest, overWall],
+        [least, warm(1)],
+        ...inSpans.map((inMiddle) => [least, warm(beside), inMiddle]),
+        [pressed, warm(1)],
+        [pressed, warm(beside), overWall],
+        ...behind.map((side) => [rest, cold(1), side]),
+        ...behind.map((side) => [rest, cold(beside), side, overWall]),
+        ...braked,
+      ].map((loads) => total([...base, ...loads])),
+      ...struck,
+    ];
   });
 }
+
+const bothWays = (load: FootLoad): FootLoad[] => [load, times(load, -1)];
 
 const times = (load: FootLoad, factor: number): FootLoad => ({
   verticalKN: factor * load.verticalKN,

@@ -39,6 +39,8 @@ export interface FrameOnFeet {
   readonly surcharge: readonly [ChainEffects, ChainEffects];
   /** 1 kN along the deck, towards its end. */
   readonly braking: ChainEffects;
+  /** Each strike on its wall: its force along, towards the end of the deck. */
+  readonly strikes: readonly (readonly ChainEffects[])[];
   /** Deck longer by 1e-5, whole stiffness. */
   readonly longer: ChainEffects;
   /** Top of the deck warmer by 1 K, whole stiffness. */
@@ -167,8 +169,11 @@ export function frameModel(task: UnitTask): FrameModel {
       feet === 'stiff' ? earth.stiffFactor : earth.softFactor,
     );
     const surchargeKPa = earth.restPressure * earth.surchargeKPa;
-    const braked = new Float64Array(3 * n);
-    braked[3 * middles[0]!] = 1;
+    const along = (node: number, kN: number): ChainEffects => {
+      const nodal = new Float64Array(3 * n);
+      nodal[3 * node] = kN;
+      return run({ nodal });
+    };
     return {
       feet,
       own: down(halves(ownKN, members)),
@@ -179,7 +184,10 @@ export function frameModel(task: UnitTask): FrameModel {
       ),
       pressure,
       surcharge: [pushed([0], () => surchargeKPa), pushed([1], () => surchargeKPa)],
-      braking: run({ nodal: braked }),
+      braking: along(middles[0]!, 1),
+      strikes: walls.map(({ struck }, w) =>
+        struck.map((node, k) => along(node, task.strikes![w]![k]!.alongKN)),
+      ),
       longer: run({ strain: inDeck.map((one) => one * 1e-5) }),
       topWarmer: run({
         curvature1PerM: inDeck.map(

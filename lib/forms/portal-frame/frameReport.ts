@@ -40,6 +40,20 @@ export function ownWeightShare(model: FrameModel, sized: SizedFrame): number {
   return Math.min(1, Math.max(0, ...shares));
 }
 
+/** Greatest force along that strikes a wall, and its moment alone in the wall; nothing where none does. */
+function struckFigures(
+  { task, shape, cases }: FrameModel,
+  wall: FrameModel['shape']['walls'][number],
+): Record<string, number> {
+  const at = shape.walls.indexOf(wall);
+  const forces = (task.strikes?.[at] ?? []).map(({ alongKN }) => alongKN);
+  if (forces.length === 0) return {};
+  const moments = cases.flatMap(({ strikes }) =>
+    strikes[at]!.flatMap(({ momentKNm }) => wall.nodes.map((node) => Math.abs(momentKNm[node]!))),
+  );
+  return { middleStruckKN: Math.max(...forces), middleStruckKNm: Math.max(...moments) };
+}
+
 /** Named figures of shape, statics and steel. */
 export function frameFigures(model: FrameModel, sized: SizedFrame): Record<string, number> {
   const { shape, task, cases, deckM3, wallM3 } = model;
@@ -67,6 +81,7 @@ export function frameFigures(model: FrameModel, sized: SizedFrame): Record<strin
           middleHeightM: middleWall.heightM,
           middleOwnKNm: -stiff!.own.momentKNm[middleWall.knee + 1]!,
           middleOwnSoftKNm: -soft!.own.momentKNm[middleWall.knee + 1]!,
+          ...struckFigures(model, middleWall),
         }
       : {}),
     wingM: shape.wingM,

@@ -35,6 +35,8 @@ export interface FrameWall {
   readonly nodes: readonly number[];
   readonly foot: number;
   readonly knee: number;
+  /** Node at which each strike of the task hits it. */
+  readonly struck: readonly number[];
 }
 
 /**
@@ -67,10 +69,9 @@ export interface FrameShape {
   readonly middles: readonly number[];
   /** Nodes of the chain, before those of a wall in the middle. */
   readonly chainNodes: number;
-  /** Elements of a wall below the soffit. */
-  readonly wallElements: number;
 }
 
+/** Elements of a wall below the soffit, where nothing strikes it. */
 const wallElements = 6;
 const deckElements = 20;
 
@@ -115,13 +116,29 @@ export function frameShape(task: UnitTask): FrameShape {
   const lines = { spanM, lengthM, supportsM, kneeM, midspanM };
   const nodes: [number, number][] = [];
   const sections: FrameSection[] = [];
+  /** Depths below the top at which a wall is struck, between its foot and the soffit. */
+  const struckM = supportsM.map((_, support) =>
+    (task.strikes?.[support] ?? []).map(({ aboveGroundM }) =>
+      Math.min(heightM[support]!, Math.max(kneeM, clear[support]! + midspanM - aboveGroundM)),
+    ),
+  );
+  /** Shares of the height below the soffit at which a wall has nodes: even steps, and where it is struck. */
+  const upsOf = (support: number): number[] => {
+    const height = heightM[support]!;
+    const even = Array.from({ length: wallElements + 1 }, (_, k) => k / wallElements);
+    const struck = struckM[support]!.map((depth) => (height - depth) / (height - kneeM));
+    const more = struck.filter(
+      (up, k) => struck.indexOf(up) === k && even.every((one) => Math.abs(one - up) > 1e-6),
+    );
+    return [...even, ...more].sort((a, b) => a - b);
+  };
   /** Nodes of a wall, the last one from its soffit down. */
   const wall = (support: number): number[] => {
     const height = heightM[support]!;
     const last = support === spansM.length;
     const part = support === 0 ? 'left wall' : last ? 'right wall' : 'middle wall';
-    return Array.from({ length: wallElements + 1 }, (_, k) => {
-      const up = (last ? wallElements - k : k) / wallElements;
+    const ups = upsOf(support);
+    return (last ? ups.reverse() : ups).map((up) => {
       // A wall between two spans is bent less than those that hold the fill: as thick all the way as they are on top.
       const thickM = part === 'middle wall' ? legTopM : legFootM + (legTopM - legFootM) * up;
       sections.push(wallSection(part, task.deck, thickM));
@@ -158,6 +175,9 @@ export function frameShape(task: UnitTask): FrameShape {
       nodes: at,
       foot: name === 'last' ? at[at.length - 1]! : at[0]!,
       knee: atAxes[support]!,
+      struck: struckM[support]!.map((depth) =>
+        at.reduce((a, b) => (Math.abs(nodes[b]![1] + depth) < Math.abs(nodes[a]![1] + depth) ? b : a)),
+      ),
     };
   });
   return {
@@ -174,7 +194,6 @@ export function frameShape(task: UnitTask): FrameShape {
     knees: [atAxes[0]!, atAxes[atAxes.length - 1]!],
     middles: atAxes.slice(1).map((node, s) => (atAxes[s]! + node) >> 1),
     chainNodes,
-    wallElements,
   };
 }
 

@@ -3,6 +3,7 @@ import { loadTrack, type Track } from '../../mechanics/index.ts';
 import { wheelStrips, type WheelStrips } from '../slab/wheelStrips.ts';
 import type { FootLoad, FrameModel, FrameOnFeet } from './frameModel.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
+import { portalData } from './portalData.ts';
 
 /** Greatest and least effects of traffic: moments at the nodes, shears in the members. */
 export interface TrafficRange {
@@ -28,6 +29,8 @@ export interface FrameTraffic {
   readonly deflectionsM: readonly number[];
   /** What all lanes put on the feet, on stiff and on soft ones. */
   readonly feet: readonly LanesOnFeet[];
+  /** The shares of that which stand beside braking. */
+  readonly feetBraking: readonly LanesOnFeet[];
 }
 
 /** Places the traffic of the standard on the influence lines of the frame. */
@@ -46,6 +49,13 @@ export function frameTraffic(model: FrameModel): FrameTraffic {
   const uniformKNm = Math.max(evenKNm, deck.widthM * strips.uniformKNm2);
   const vehicle: TrafficLoad = { ...load, vehicleFactor: 1, udlKNm: laneKNm, footwayKNm: 0 };
   const uniform: TrafficLoad = { ...load, vehicleFactor: 0, udlKNm: 1, footwayKNm: 0 };
+  const { vehicleWithBraking, uniformWithBraking } = portalData.factors[task.standard];
+  const braking: TrafficLoad = {
+    ...load,
+    vehicleFactor: vehicleWithBraking * load.vehicleFactor,
+    udlKNm: uniformWithBraking * load.udlKNm,
+    footwayKNm: uniformWithBraking * load.footwayKNm,
+  };
   return {
     strips,
     load,
@@ -55,6 +65,7 @@ export function frameTraffic(model: FrameModel): FrameTraffic {
     })),
     deflectionsM: shape.middles.map((_, span) => deflection(model, track, load, span)),
     feet: model.cases.map((one) => onFeet(model, one, load)),
+    feetBraking: model.cases.map((one) => onFeet(model, one, braking)),
   };
 }
 

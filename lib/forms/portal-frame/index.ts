@@ -22,15 +22,20 @@ export const portalFrame: FormModule = {
   name: 'Portal frame',
   pattern: { kind: 'continuous', mostSpans: 2 },
   methods: ['falsework'],
+  wallsInOne: true,
   size,
 };
 
-/** @throws RangeError for more than two spans, or depths or widths that are not possible */
+/** @throws RangeError for more than two spans, depths or widths that are not possible, or strikes that do not go with the walls */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
   if (task.spansM.length > 2)
     throw new RangeError(
       `spansM: expected one span or two, received ${task.spansM.length}; a portal frame stands on its walls`,
+    );
+  if (task.strikes && task.strikes.length !== task.spansM.length + 1)
+    throw new RangeError(
+      `strikes: expected a list for each of ${task.spansM.length + 1} walls, received ${task.strikes.length}; leave it out where nothing strikes them`,
     );
   const model = frameModel(task);
   const sized = sizeFrame(model);

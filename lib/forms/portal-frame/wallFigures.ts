@@ -1,4 +1,4 @@
-import { described, type At, type Descriptor } from '../../model/index.ts';
+import { described, type At, type Descriptor, type Strike } from '../../model/index.ts';
 import { linesOf, spansOf } from '../common/formManual.ts';
 
 /** Name of a wall: of two or of three. */
@@ -10,6 +10,14 @@ const isMiddle = (at: At): boolean => nameOf(at) === 'middle';
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 const wallPath = (what: string): string => `options/:option/designs/:unit/walls/:wall/${what}`;
 const wallWord = (at: At): string => `${nameOf(at)} wall`;
+
+const loadOf = (at: At) => at.design.walls![at.index('wall')]!.loads[at.index('load')]!;
+
+/** A field of all that may strike a wall of the unit. */
+const strikesOf = (at: At, field: keyof Strike): string[] =>
+  (at.design.task.strikes ?? []).flatMap((strikes, s) =>
+    strikes.map((_, k) => `${at.unit}/task/strikes/${s}/${k}/${field}`),
+  );
 
 /** What a wall in one with the deck hands to its foundation and to the bill. */
 export const wallFigures: readonly Descriptor[] = [
@@ -78,8 +86,10 @@ export const wallFigures: readonly Descriptor[] = [
       label: (at) => `${label} on the foundation, ${wallWord(at)}, combination ${at.index('load') + 1}`,
       unit,
       method: 'frame on stiff and on soft feet',
-      formula:
-        'own weight + superimposed load + fill (at rest, least, or K*) + temperature and shrinkage + surcharge + traffic, characteristic, as they go together',
+      formula: (at) =>
+        loadOf(at).struck
+          ? 'own weight + superimposed load + fill at rest + a wall of the frame struck, either way, its head held by the deck; no traffic'
+          : 'own weight + superimposed load + fill (at rest, least, or K*) + temperature and shrinkage + surcharge + traffic, with or without braking that all walls share by stiffness, characteristic, as they go together',
       inputs: (at) => ({
         spans: spansOf(at),
         deck: `${at.unit}/task/depthM`,
@@ -90,7 +100,27 @@ export const wallFigures: readonly Descriptor[] = [
         active: 'data/portal-frame/earth/activePressure',
         warmer: 'data/portal-frame/temperature/warmerK',
         colder: 'data/portal-frame/temperature/colderK',
+        struck: loadOf(at).struck
+          ? [`${at.unit}/walls/${at.index('wall')}/loads/${at.index('load')}/struck/alongKN`]
+          : [],
       }),
+    }),
+  ),
+  ...(
+    [
+      ['alongKN', 'force along the road', 'kN'],
+      ['acrossKN', 'force across the road', 'kN'],
+      ['aboveGroundM', 'height above ground', 'm'],
+    ] as const
+  ).map(([field, label, unit]) =>
+    described({
+      path: wallPath(`loads/:load/struck/${field}`),
+      label: (at) => `${label} of what strikes a wall, ${wallWord(at)}, combination ${at.index('load') + 1}`,
+      unit,
+      method: 'as given',
+      formula:
+        field === 'acrossKN' ? 'of what may strike this wall; 0 at the others' : 'of what may strike a wall',
+      inputs: (at) => ({ strikes: strikesOf(at, field) }),
     }),
   ),
 ];

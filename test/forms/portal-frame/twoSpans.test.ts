@@ -211,3 +211,98 @@ describe('statics of two spans against other ways', () => {
     expect(startKNm[1 + pieces]! / (-fixed * (1 + kb / (2 * (kc + kb))))).toBeCloseTo(1, 2);
   });
 });
+
+describe('a middle wall that is struck', () => {
+  const lorry = { alongKN: 1000, acrossKN: 0, aboveGroundM: 1.25 };
+  const struck = (spansM: readonly number[], depthM: number) =>
+    task(spansM, depthM, { strikes: [[], [lorry], []] });
+
+  it('is a propped wall by hand: 1000 kN at 1.25 m over ground, foot and head between built in and free to turn', () => {
+    const model = frameModel(struck([20, 20], 0.7));
+    const wall = model.shape.walls[1]!;
+    const [node] = wall.struck;
+    // 0.5 m of the wall stands in the ground.
+    expect(model.shape.nodes[node!]![1] + wall.heightM).toBeCloseTo(1.75, 9);
+    const [a, h] = [1.75, wall.heightM];
+    for (const { strikes } of model.cases) {
+      const effects = strikes[1]![0]!;
+      const feet = effects.feet;
+      // Towards the last span at the first foot is towards its span; at the last foot the other way.
+      expect(feet[0]!.alongKN + feet[1]!.alongKN - feet[2]!.alongKN).toBeCloseTo(1000, 6);
+      // Held at the head, less bending than of a cantilever; more than of a beam built in at both ends.
+      const most = Math.max(...wall.nodes.map((at) => Math.abs(effects.momentKNm[at]!)));
+      expect(most).toBeLessThan(1000 * a);
+      expect(most).toBeGreaterThan((1000 * 2 * a ** 2 * (h - a) ** 2) / h ** 3);
+    }
+    // On soft feet that turn freely: the foot of a beam built in at a head that stays takes P b2 (2 h + a) / (2 h3); what
+    // holds the head is then let go, and the walls share it as they share braking.
+    const [, soft] = model.cases;
+    const b = h - a;
+    const held = (b ** 2 * (2 * h + a)) / (2 * h ** 3);
+    const byHand = 1000 * (held + (1 - held) * soft!.braking.feet[1]!.alongKN);
+    const { feet, momentKNm } = soft!.strikes[1]![0]!;
+    expect(Math.abs(feet[1]!.alongKN / byHand - 1)).toBeLessThan(0.03);
+    expect(feet[1]!.momentKNm).toBeCloseTo(0, 6);
+    expect(Math.abs(momentKNm[node!]!)).toBeCloseTo(a * feet[1]!.alongKN, 6);
+  });
+
+  it('has the bars for it, and its footing the loads of it without traffic; the other footings what the deck hands on', () => {
+    const free = portalFrame.size(task([20, 20], 0.7));
+    const design = portalFrame.size(struck([20, 20], 0.7));
+    expect(useOf(design, 'bars-wall-middle')).toBeGreaterThanOrEqual(useOf(free, 'bars-wall-middle'));
+    expect(design.walls![1]!.reinforcementKg).toBeGreaterThanOrEqual(free.walls![1]!.reinforcementKg);
+    for (const { loads } of design.walls!) {
+      const hits = loads.filter((load) => load.struck !== undefined);
+      expect(hits).toHaveLength(4);
+      // Without traffic; both ways together leave what stands there at rest.
+      const rests = [loads[0]!, loads[loads.length / 2]!];
+      rests.forEach((rest, k) =>
+        expect((hits[2 * k]!.verticalKN + hits[2 * k + 1]!.verticalKN) / 2).toBeCloseTo(rest.verticalKN, 6),
+      );
+    }
+    expect(design.figures['middleStruckKN']).toBe(1000);
+    expect(free.figures['middleStruckKN']).toBeUndefined();
+  });
+
+  it('takes a vessel across in its own plane: force x height by hand, and refuses strikes that are not one list a wall', () => {
+    const vessel = { alongKN: 0, acrossKN: 24_000, aboveGroundM: 3 };
+    const asked = task([20, 20], 0.7, { strikes: [[], [vessel], []] });
+    const design = portalFrame.size(asked);
+    const across = design.checks.find(({ id }) => id === 'wall-across')!;
+    expect(across.demand).toBeCloseTo(24_000 * 3.5, 6);
+    // By hand: 7400 kN of weight on half of 12 m, less its stress block, and the bars: more than the weight alone.
+    const [weight] = design.walls![1]!.loads.map(({ verticalKN }) => verticalKN);
+    expect(across.capacity).toBeGreaterThan(weight! * 5.5);
+    expect(portalFrame.size(task([20, 20], 0.7)).checks.some(({ id }) => id === 'wall-across')).toBe(false);
+    expect(() => portalFrame.size({ ...asked, strikes: [[vessel]] })).toThrow(
+      /strikes: expected a list for each of 3 walls, received 1/u,
+    );
+  });
+
+  it('bends in a heavy blow until the bars do not fit', () => {
+    const blow = (alongKN: number): Design =>
+      portalFrame.size(task([20, 20], 0.7, { strikes: [[], [{ ...lorry, alongKN }], []] }));
+    expect(useOf(blow(40_000), 'bending-wall-middle')).toBeGreaterThan(1);
+    expect(useOf(blow(40_000), 'shear-walls')).toBeGreaterThan(useOf(blow(1000), 'shear-walls'));
+  });
+});
+
+it('footLoads() have braking in them, shared by all walls: 360 + 2.7 L with three quarters of the vehicles', () => {
+  const asked = task([20, 20], 0.7);
+  const { cases } = frameModel(asked);
+  const design = portalFrame.size(asked);
+  const brakingKN = 360 + 2.7 * 40;
+  const loads = design.walls!.map((wall) => wall.loads.slice(0, wall.loads.length / 2));
+  // At rest with braking one way and the other: half of their difference is the share of the wall.
+  design.walls!.forEach((_, w) => {
+    const share = brakingKN * cases[0]!.braking.feet[w]!.alongKN;
+    const pairs = loads[w]!.filter((a) =>
+      loads[w]!.some(
+        (b) =>
+          Math.abs((a.alongKN - b.alongKN) / 2 - share) < 1e-6 &&
+          Math.abs((a.momentKNm - b.momentKNm) / 2 - brakingKN * cases[0]!.braking.feet[w]!.momentKNm) < 1e-6,
+      ),
+    );
+    expect(pairs.length).toBeGreaterThanOrEqual(7);
+  });
+});
