@@ -1,6 +1,6 @@
 import { formModule } from '../forms/index.ts';
 import type { Design, FormId, MeasuredLine, MethodId, Pattern, Site } from '../model/index.ts';
-import { sideRatioWindow } from '../rules/index.ts';
+import { leastOfTwoSpans, sideRatioWindow } from '../rules/index.ts';
 import { deckOnSupport } from '../substructure/index.ts';
 import { meanClearance } from './meanClearance.ts';
 import { methodLines } from '../takeoff/index.ts';
@@ -34,16 +34,25 @@ export type CostOf = (lines: readonly MeasuredLine[]) => number;
 
 const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.item === 'method-setup';
 
-/** One span or two in one with their walls: tried as one span. */
+/** One span or two in one with their walls. */
 const isFrame = (pattern: Pattern): boolean =>
   pattern.kind === 'continuous' && (pattern.mostSpans ?? Infinity) <= 2;
 
-/** A unit of ordinary proportions for one governing span: its spans, and its pylons where the form has them. */
-function trialUnit(form: FormId, spanM: number, pylons: 1 | 2): { spansM: number[]; pylons?: number[] } {
+/**
+ * A unit of ordinary proportions for one governing span on a crossing: its spans, and its pylons where the form has them.
+ * Of a frame the longer of two spans reaches no farther than where the shorter is the least of it: a longer one stands alone.
+ */
+function trialUnit(
+  form: FormId,
+  spanM: number,
+  pylons: 1 | 2,
+  lengthM: number,
+): { spansM: number[]; pylons?: number[] } {
   const pattern = formModule(form).pattern;
   if (pattern.kind === 'simple-main') return { spansM: [spanM] };
   if (pattern.kind === 'continuous' || pattern.kind === 'flanked') {
-    if (isFrame(pattern)) return { spansM: [spanM] };
+    if (isFrame(pattern))
+      return { spansM: spanM * (1 + leastOfTwoSpans(form)) <= lengthM ? [spanM, spanM] : [spanM] };
     return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
   }
   const [least, most] =
@@ -102,12 +111,13 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     ...(formModule(form).ignoresHeight ? {} : { clearM: meanClearance(site) }),
   };
 
+  const unitOver = (spanM: number, pylons: 1 | 2) => trialUnit(form, spanM, pylons, site.lengthM);
+  // A wall between spans is priced where it stands, like any pier.
+  const isOfDeck = (line: MeasuredLine): boolean => !isFixed(line) && line.part !== 'piers';
   const sized = (
-    spanM: number,
+    unit: ReturnType<typeof trialUnit>,
     depthM: number,
-    pylons: 1 | 2,
   ): { design: Design; perM: number; fixed: number } => {
-    const unit = trialUnit(form, spanM, pylons);
     const { clearM, ...task } = base;
     const height = clearM === undefined ? {} : { clearUnderM: [clearM, ...unit.spansM.map(() => clearM)] };
     const design = size({ ...task, ...height, depthM, ...unit });
@@ -115,9 +125,19 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     const lengthM = unit.spansM.reduce((sum, span) => sum + span, 0);
     return {
       design,
-      perM: costOf(lines.filter((line) => !isFixed(line))) / lengthM,
+      perM: costOf(lines.filter(isOfDeck)) / lengthM,
       fixed: costOf(lines.filter(isFixed)),
     };
+  };
+
+  /** What a metre of a shorter span costs in a unit of the same depth. */
+  const shorter = (spansM: readonly number[], share: number, depthM: number, perM: number): number => {
+    const [spanM = 0, ...others] = spansM;
+    if (!isFrame(pattern) || others.length === 0)
+      return sized({ spansM: spansM.map((one) => share * one) }, depthM).perM;
+    // Of two spans what the shorter adds to the longer, so that both together are what they cost.
+    const both = sized({ spansM: [spanM, share * spanM] }, depthM).perM * (1 + share);
+    return (both - perM) / share;
   };
 
   const { joined } = formModule(form);
@@ -131,29 +151,31 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
 
   const made = function* (index: number): Work<TrialRow> {
     const spanM = spansM[index]!;
-    const range = depthRange(form, method, trialUnit(form, spanM, 1).spansM, site);
+    const unit = unitOver(spanM, 1);
+    const range = depthRange(form, method, unit.spansM, site);
     // The best depth is nearly the same share of the band for one span as for the one before it.
     const before = index > 0 ? yield* make(index - 1) : undefined;
     const look = before && (before.depthM * range[1]) / before.mostDepthM;
     const depthM = yield* leastCostDepth(
       range,
       (trialM) => {
-        const { design, perM } = sized(spanM, trialM, 1);
+        const { design, perM } = sized(unit, trialM);
         return { cost: perM, utilisation: design.limitingCheck.utilisation };
       },
       look,
     );
-    const whole = sized(spanM, depthM, 1);
+    const whole = sized(unit, depthM);
     yield;
     // Only a continuous unit has shorter spans of the same depth.
     // Where no depth of the band is strong enough, what is lacking has its price: a span that fails is no bargain.
     const weak = Math.max(1, whole.design.limitingCheck.utilisation);
     const perM = SHARES.map(
       (share) =>
-        weak * (share === 1 || kind !== 'continuous' ? whole.perM : sized(share * spanM, depthM, 1).perM),
+        weak *
+        (share === 1 || kind !== 'continuous' ? whole.perM : shorter(unit.spansM, share, depthM, whole.perM)),
     );
     yield;
-    const double = hung ? sized(spanM, depthM, 2) : null;
+    const double = hung ? sized(unitOver(spanM, 2), depthM) : null;
     const fixed = double ? [whole.fixed, whole.fixed, double.fixed] : [whole.fixed];
     const { permanentKNm, trafficKNm } = deckOnSupport(whole.design);
     return {
@@ -168,7 +190,7 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     };
   };
 
-  const key = (index: number): string => JSON.stringify([base, spansM[index], booksKey]);
+  const key = (index: number): string => JSON.stringify([base, unitOver(spansM[index]!, 1).spansM, booksKey]);
   const known: (TrialRow | undefined)[] = spansM.map((_, index) => rows.get(key(index)));
   const make = function* (index: number): Work<TrialRow> {
     return (known[index] ??= rows.put(key(index), yield* made(index)));
