@@ -1,10 +1,14 @@
 import { chainage, length, level } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
-import type { AppraisedOption, FormId, Site } from '../model.ts';
+import type { AppraisedOption, Design, FormId, Site } from '../model.ts';
 import { spansOf, roadTop, structureTop } from './alongOption.ts';
 
 /** Whether an option's main unit is deeper at its supports than at midspan. */
 const isHaunched = (option: AppraisedOption): boolean => option.depthM.support > option.depthM.midspan + 0.05;
+
+/** Whether a deck stands on walls in one with it, not on piers. */
+export const onWalls = (designs: readonly Design[]): boolean =>
+  designs.some(({ walls }) => walls !== undefined && walls.length > 0);
 
 /** Heading of an option: the form, haunched where it is, and the form of its approaches where that is another. */
 export function optionTitle(option: AppraisedOption): string {
@@ -26,7 +30,7 @@ export function optionTitle(option: AppraisedOption): string {
 export function optionNote(site: Site, option: AppraisedOption): string {
   const { support, midspan } = option.depthM;
   const depth = isHaunched(option)
-    ? `${level(midspan)} m at midspan, ${level(support)} m at piers`
+    ? `${level(midspan)} m at midspan, ${level(support)} m at ${onWalls(option.designs) ? 'walls' : 'piers'}`
     : `${level(midspan)} m deep`;
   const beams = option.variant?.substringers ? ', substringers between the girders' : '';
   const across = option.variant?.transverse ? ', top slab prestressed across' : '';

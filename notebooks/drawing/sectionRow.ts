@@ -4,6 +4,7 @@ import { optionNumber } from '../forms/optionNumber.ts';
 import type { AppraisedOption, Design } from '../model.ts';
 import { ofOption } from './asked.ts';
 import type { Paper } from './ink.ts';
+import { onWalls } from './optionWords.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { wrapText } from './lettering.ts';
@@ -57,7 +58,7 @@ const depthPaths = (option: AppraisedOption, { depthM }: Design): string[] =>
 function depthLines(design: Design): string[] {
   const { support, midspan } = design.depthM;
   return support > midspan + 0.05
-    ? [`${level(support)} at pier, ${level(midspan)} at midspan`]
+    ? [`${level(support)} at ${onWalls([design]) ? 'wall' : 'pier'}, ${level(midspan)} at midspan`]
     : [`${level(midspan)} m deep`];
 }
 
