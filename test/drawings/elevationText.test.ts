@@ -4,9 +4,7 @@ import { elevation } from '../../notebooks/drawing/elevation.ts';
 import { elevationText } from '../../notebooks/drawing/elevationText.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { stack } from '../../notebooks/drawing/stack.ts';
-import { workedOut } from '../appraise/workedOut.ts';
-import { optionNote } from '../../notebooks/drawing/optionWords.ts';
-import { elements, wordsOf } from './golden.ts';
+import { elements } from './golden.ts';
 import { budget, crested, lowSite, obstacles, options, site, standing } from './fixture.ts';
 
 const second = options[1]!;
@@ -77,21 +75,4 @@ describe('every elevation', () => {
   it('a bare crossing is described by nothing', () => {
     expect(crossing({ site, option: null, widthPx: 980 }).attrs).not.toHaveProperty('aria-describedby');
   });
-});
-
-it('the band has the place at which a deck hangs lowest into an envelope, beside the support that stands close to it', () => {
-  const { site: median, options: worked } = workedOut('stonebeck-lane');
-  const frame = worked.find(
-    ({ form, units }) => form === 'portal-frame' && units[0]!.supportsM.length === 3,
-  )!;
-  const said = elevationText(median, frame);
-  const [, low, at] = /(\d\.\d\d) m too low at chainage ([\d.]+)/u.exec(said)!;
-  const middle = frame.units[0]!.supportsM[1]!;
-  // Closer to the wall between the carriageways than two figures have room.
-  expect(Math.abs(middle - Number(at))).toBeLessThan(3);
-  const words = wordsOf(crossing({ site: median, option: frame, widthPx: 760 }));
-  expect(words).toContain(at);
-  expect(words).toContain(`−${low}`);
-  expect(words).toContain(middle.toFixed(1));
-  expect(optionNote(median, frame)).toContain('m at walls');
 });

@@ -11,6 +11,8 @@ import { crossing } from '../../notebooks/drawing/crossing.ts';
 import { deckStrips } from '../../notebooks/drawing/deckStrips.ts';
 import { elevation, wantsWidth } from '../../notebooks/drawing/elevation.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
+import { elevationText } from '../../notebooks/drawing/elevationText.ts';
+import { optionNote } from '../../notebooks/drawing/optionWords.ts';
 import { plan } from '../../notebooks/drawing/plan.ts';
 import { section } from '../../notebooks/drawing/section.ts';
 import { roadProfile } from '../../notebooks/drawing/roadProfile.ts';
@@ -290,6 +292,25 @@ describe('stack(input) of a long crossing', { timeout: 120_000 }, () => {
       const beside = decks.map(boxOf).filter(({ right }) => right > 980);
       expect(Math.min(...beside.map(({ top }) => top))).toBeGreaterThan(lowest);
     }
+  });
+});
+
+describe('data band of an example', { timeout: 120_000 }, () => {
+  it('has the place at which a deck hangs lowest into an envelope, beside the support that stands close to it', () => {
+    const { site, options } = example('stonebeck-lane').appraisal;
+    const frame = options.find(
+      ({ form, units }) => form === 'portal-frame' && units[0]!.supportsM.length === 3,
+    )!;
+    const said = elevationText(site, frame);
+    const [, low, at] = /(\d\.\d\d) m too low at chainage ([\d.]+)/u.exec(said)!;
+    const middle = frame.units[0]!.supportsM[1]!;
+    // Closer to the wall between the carriageways than two figures have room.
+    expect(Math.abs(middle - Number(at))).toBeLessThan(3);
+    const words = wordsOf(file(crossing({ site, option: frame, widthPx: 760 })));
+    expect(words).toContain(at);
+    expect(words).toContain(`−${low}`);
+    expect(words).toContain(middle.toFixed(1));
+    expect(optionNote(site, frame)).toContain('m at walls');
   });
 });
 

@@ -30,7 +30,9 @@ export interface FrameTendons {
 }
 
 /** Shares of the greatest drape that are tried where tendons run over a wall in the middle. */
-const drapes = [1, 0.85, 0.7, 0.55, 0.4, 0.25, 0.1] as const;
+const drapes: readonly number[] = [1, 0.85, 0.7, 0.55, 0.4, 0.25, 0.1];
+/** Shares of the step to the drape beside at which more are tried where none of those holds. */
+const between = [0.25, 0.5, 0.75] as const;
 
 /**
  * Fewest strands with which the deck stays compressed (EN, frequent) or within its tension (AASHTO, Service III). In one
@@ -40,14 +42,31 @@ const drapes = [1, 0.85, 0.7, 0.55, 0.4, 0.25, 0.1] as const;
  */
 export function frameTendons(model: FrameModel, traffic: FrameTraffic, atLeast = 0): FrameTendons {
   if (model.task.spansM.length === 1) return tendonsAt(model, traffic, atLeast, 1);
-  const overStressed = ({ compression, freshTension }: FrameTendons): number =>
-    Math.max(1, compression.stressMPa / compression.limitMPa, freshTension.stressMPa / freshTension.limitMPa);
-  return drapes
-    .map((drape) => tendonsAt(model, traffic, atLeast, drape))
-    .reduce((a, b) => {
-      const [over, other] = [overStressed(a), overStressed(b)];
-      return other < over || (other === over && b.strands < a.strands) ? b : a;
-    });
+  const tried = (drape: number) => {
+    const tendons = tendonsAt(model, traffic, atLeast, drape);
+    return { drape, tendons, over: overUsed(tendons) };
+  };
+  const better = (a: ReturnType<typeof tried>, b: typeof a): typeof a =>
+    b.over < a.over || (b.over === a.over && b.tendons.strands < a.tendons.strands) ? b : a;
+  const coarse = drapes.map(tried).reduce(better);
+  if (coarse.over === 1) return coarse.tendons;
+  // One that holds may lie between two that do not: too much of it on the day of stressing, too little in service.
+  const i = drapes.indexOf(coarse.drape);
+  const beside = [drapes[i - 1], drapes[i + 1]].filter((drape) => drape !== undefined);
+  return beside
+    .flatMap((other) => between.map((share) => tried(coarse.drape + share * (other - coarse.drape))))
+    .reduce(better, coarse).tendons;
+}
+
+/** Greatest use of what a drape has to hold: force in service, compression, tension on the day of stressing; 1 where all do. */
+function overUsed({ needKN, forceKN, compression, freshTension }: FrameTendons): number {
+  const most = Math.max(
+    needKN / forceKN,
+    compression.stressMPa / compression.limitMPa,
+    freshTension.stressMPa / freshTension.limitMPa,
+  );
+  // Strands are whole numbers of what is needed but for rounding.
+  return most <= 1 + 1e-5 ? 1 : most;
 }
 
 function tendonsAt(model: FrameModel, traffic: FrameTraffic, atLeast: number, drape: number): FrameTendons {

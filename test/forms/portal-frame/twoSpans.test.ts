@@ -306,3 +306,12 @@ it('footLoads() have braking in them, shared by all walls: 360 + 2.7 L with thre
     expect(pairs.length).toBeGreaterThanOrEqual(7);
   });
 });
+
+it('portalFrame.size() weighs service against the day of stressing where no drape holds both', () => {
+  // 45 + 45 m at a twenty-second: the haunches are so heavy that the drape of 0.4 tears the young deck by 3 % and that of
+  // 0.25 is 10 % short in service. At a twenty-sixth, less heavy, there is one that holds.
+  const deep = portalFrame.size(task([45, 45], 45 / 22));
+  expect(deep.limitingCheck.utilisation).toBeLessThan(1.03);
+  expect(useOf(deep, 'service-tension')).toBeLessThan(1.03);
+  expect(portalFrame.size(task([45, 45], 45 / 26)).limitingCheck.utilisation).toBeLessThanOrEqual(1.00001);
+});
