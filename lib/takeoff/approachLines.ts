@@ -9,7 +9,7 @@ import { furnitureOver } from './furnitureLines.ts';
  * thickness and a footing as wide as a share of the height. Where an abutment stands inside the crossing, the road from
  * there to the end of the crossing has surfacing and edges on the fill as it would have on the deck, so that bridges of
  * any length are paid for over the same road. An existing road that is regraded behind a fixed end is filled or dug away,
- * held by walls where the approaches are, and surfaced and edged anew.
+ * held by walls where the approaches are, and surfaced and edged anew over its whole length (common practice, no source).
  */
 export function approachLines(site: Site, profile: RoadProfile): MeasuredLine[] {
   const { road } = site;

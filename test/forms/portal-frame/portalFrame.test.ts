@@ -4,33 +4,8 @@ import { pressureAt, pressureOnNodes, ratchetPressure } from '../../../lib/forms
 import { frameModel } from '../../../lib/forms/portal-frame/frameModel.ts';
 import { frameShape } from '../../../lib/forms/portal-frame/frameShape.ts';
 import { portalFrame } from '../../../lib/forms/portal-frame/index.ts';
-import type { UnitTask } from '../../../lib/model/index.ts';
 import { splitQuantities, itemOf } from '../../../lib/takeoff/index.ts';
-
-const deck = {
-  widthM: 12,
-  carriagewayM: 9,
-  carriagewayOffsetM: 0,
-  lanes: 2,
-  footwayM: 2,
-  surfacingM: 0.09,
-  superimposedKNm: 45,
-};
-
-const task = (spanM: number, depthM: number, more: Partial<UnitTask> = {}): UnitTask => ({
-  form: 'portal-frame',
-  method: 'falsework',
-  spansM: [spanM],
-  deck,
-  standard: 'lm1',
-  planRadiusM: Infinity,
-  depthM,
-  clearUnderM: [5.5, 5.5],
-  ...more,
-});
-
-const useOf = (design: ReturnType<typeof portalFrame.size>, id: string): number =>
-  design.checks.find((check) => check.id === id)!.utilisation;
+import { deck, task, useOf } from './trialFrame.ts';
 
 describe('portalFrame.size()', () => {
   it.each([
@@ -38,12 +13,12 @@ describe('portalFrame.size()', () => {
     [{ depthM: NaN }, /depthM/u],
     [{ deck: { ...deck, carriagewayM: 13 } }, /carriagewayM/u],
   ])('size(%o) says what is wrong', (change, message) => {
-    expect(() => portalFrame.size({ ...task(20, 0.7), ...change })).toThrow(message);
+    expect(() => portalFrame.size({ ...task([20], 0.7), ...change })).toThrow(message);
   });
 
   it('is reinforced on short spans and prestressed on longer ones, every check within its limit', () => {
-    const short = portalFrame.size(task(18, 0.6));
-    const long = portalFrame.size(task(38, 1.2));
+    const short = portalFrame.size(task([18], 0.6));
+    const long = portalFrame.size(task([38], 1.2));
     expect(quantityOf(short.lines, 'prestress')).toBe(0);
     expect(quantityOf(long.lines, 'prestress')).toBeGreaterThan(0);
     for (const design of [short, long])
@@ -51,7 +26,7 @@ describe('portalFrame.size()', () => {
   });
 
   it('measures only items of the bill; deck above, walls among the supports', () => {
-    const design = portalFrame.size(task(18, 0.6));
+    const design = portalFrame.size(task([18], 0.6));
     for (const { item, quantity } of design.lines) {
       expect(() => itemOf(item)).not.toThrow();
       expect(quantity).toBeGreaterThan(0);
@@ -67,7 +42,7 @@ describe('portalFrame.size()', () => {
       [16, 0.6],
       [38, 1.2],
     ] as const) {
-      const design = portalFrame.size(task(spanM, depthM));
+      const design = portalFrame.size(task([spanM], depthM));
       const { concreteM3 } = splitQuantities(design.lines).superstructure;
       const walls = 2 * design.walls![0]!.concreteM3;
       const sum = design.reactions.reduce((all, { permanentKN }) => all + permanentKN, 0);
@@ -76,14 +51,14 @@ describe('portalFrame.size()', () => {
   });
 
   it('balances thrust: what one foot pushes, the other and the fill push back', () => {
-    const { cases } = frameModel(task(20, 0.7));
+    const { cases } = frameModel(task([20], 0.7));
     for (const one of cases) {
       const [first, last] = [one.own.feet[0]!, one.own.feet[1]!];
       expect(first.alongKN).toBeCloseTo(last.alongKN, 6);
       expect(first.alongKN).toBeLessThan(0);
       // Surcharge behind the first wall alone: 0.43 x 10 kPa on the height and the width of the wall.
       const [a, b] = [one.surcharge[0].feet[0]!, one.surcharge[0].feet[1]!];
-      const height = frameShape(task(20, 0.7)).walls[0]!.heightM;
+      const height = frameShape(task([20], 0.7)).walls[0]!.heightM;
       expect(a.alongKN - b.alongKN).toBeCloseTo(0.43 * 10 * height * 12, 6);
       // Braking goes into both feet.
       const [c, d] = [one.braking.feet[0]!, one.braking.feet[1]!];
@@ -92,8 +67,8 @@ describe('portalFrame.size()', () => {
   });
 
   it('is the same seen from the other end', () => {
-    const one = portalFrame.size(task(22, 0.75, { clearUnderM: [5, 7] }));
-    const other = portalFrame.size(task(22, 0.75, { clearUnderM: [7, 5] }));
+    const one = portalFrame.size(task([22], 0.75, { clearUnderM: [5, 7] }));
+    const other = portalFrame.size(task([22], 0.75, { clearUnderM: [7, 5] }));
     expect(other.checks.map(({ id }) => [id, useOf(other, id).toFixed(6)])).toEqual(
       one.checks.map(({ id }) => [id, useOf(one, id).toFixed(6)]),
     );
@@ -103,19 +78,19 @@ describe('portalFrame.size()', () => {
   });
 
   it('moves the right way with the stiffness of its feet and the height of its walls', () => {
-    const low = portalFrame.size(task(22, 0.75)).figures;
-    const high = portalFrame.size(task(22, 0.75, { clearUnderM: [9, 9] })).figures;
+    const low = portalFrame.size(task([22], 0.75)).figures;
+    const high = portalFrame.size(task([22], 0.75, { clearUnderM: [9, 9] })).figures;
     expect(low.kneeOwnKNm!).toBeGreaterThan(low.kneeOwnSoftKNm!);
     expect(low.midspanOwnKNm!).toBeLessThan(low.midspanOwnSoftKNm!);
     expect(high.thrustOwnKN!).toBeLessThan(low.thrustOwnKN!);
     // A simple span carries w L2 / 8; the knee takes part of it off the middle.
-    const { cases, shape } = frameModel(task(22, 0.75));
+    const { cases, shape } = frameModel(task([22], 0.75));
     const middle = (shape.knees[0] + shape.knees[1]) >> 1;
     expect(cases[0]!.own.momentKNm[middle]! - cases[0]!.own.momentKNm[shape.knees[0]]!).toBeGreaterThan(0);
   });
 
   it('draws one closed face from wall to wall with its soffit where the depth along it says', () => {
-    const design = portalFrame.size(task(22, 0.75));
+    const design = portalFrame.size(task([22], 0.75));
     const face = design.elevation.find(({ part }) => part === 'deck')!;
     const middle = face.points.filter(([x, z]) => z < 0 && Math.abs(x - 11) < 0.6);
     expect(middle.length).toBeGreaterThan(0);
@@ -156,7 +131,7 @@ describe('ratchetPressure(height, range, factor)', () => {
 
 describe('frameShape(task)', () => {
   it('runs from the foot to the soffit on both sides', () => {
-    const shape = frameShape(task(20, 0.7));
+    const shape = frameShape(task([20], 0.7));
     const first = shape.walls[0]!.nodes.map((i) => shape.nodes[i]![1]);
     const last = shape.walls[1]!.nodes.map((i) => shape.nodes[i]![1]);
     expect(first[0]).toBeCloseTo(-shape.walls[0]!.heightM, 9);

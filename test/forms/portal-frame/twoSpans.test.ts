@@ -5,33 +5,9 @@ import { frameModel, type FrameModel } from '../../../lib/forms/portal-frame/fra
 import { portalFrame } from '../../../lib/forms/portal-frame/index.ts';
 import { portalData } from '../../../lib/forms/portal-frame/portalData.ts';
 import { frameEffects, planeFrame } from '../../../lib/mechanics/index.ts';
-import type { Design, UnitTask } from '../../../lib/model/index.ts';
+import type { Design } from '../../../lib/model/index.ts';
 import { itemOf, splitQuantities } from '../../../lib/takeoff/index.ts';
-
-const deck = {
-  widthM: 12,
-  carriagewayM: 9,
-  carriagewayOffsetM: 0,
-  lanes: 2,
-  footwayM: 2,
-  surfacingM: 0.09,
-  superimposedKNm: 45,
-};
-
-const task = (spansM: readonly number[], depthM: number, more: Partial<UnitTask> = {}): UnitTask => ({
-  form: 'portal-frame',
-  method: 'falsework',
-  spansM,
-  deck,
-  standard: 'lm1',
-  planRadiusM: Infinity,
-  depthM,
-  clearUnderM: [5.5, ...spansM.map(() => 5.5)],
-  ...more,
-});
-
-const useOf = (design: Design, id: string): number =>
-  design.checks.find((check) => check.id === id)!.utilisation;
+import { task, useOf } from './trialFrame.ts';
 
 /** Movements of a frame under 1 kN down at a node, by dense matrices in the axes of each member: another way, another solver. */
 function denseMoments(model: FrameModel, node: number): number[] {
