@@ -68,6 +68,8 @@ export default defineConfig({
           isolate: false,
           // Left to itself the runner keeps a processor free.
           maxWorkers: '100%',
+          // Sizing makes much that is short-lived: with room for it a tenth less time goes into collecting it.
+          execArgv: ['--max-semi-space-size=64'],
           setupFiles: ['test/setup.ts'],
           testTimeout: 30_000,
           hookTimeout: 60_000,
@@ -79,6 +81,8 @@ export default defineConfig({
           root,
           include: ['test/browser/**/*.test.ts'],
           fileParallelism: false,
+          // One browser and its opened studies serve all files.
+          isolate: false,
           testTimeout: 60_000,
           hookTimeout: 60_000,
         },

@@ -35,14 +35,15 @@ function runProject(project) {
 
 mkdirSync(resolve(root, '.cache'), { recursive: true });
 process.stdout.write('Unit tests, and beside them types, lint, build and browser tests ...\n');
-// Unit tests need nothing of the others; browser tests need what is built, and wait half their time.
+// Unit tests need nothing of the others; browser tests need what is built, and take longest in a row.
 const unit = runProject('unit');
-await runTogether([
+const checked = runTogether([
   ['npm', 'run', '--silent', 'types'],
   ['npm', 'run', '--silent', 'lint'],
-  ['npx', 'vite', 'build', '--logLevel', 'warn'],
 ]);
+await runTogether([['npx', 'vite', 'build', '--logLevel', 'warn']]);
 const outcomes = await Promise.all([unit, runProject('browser')]);
+await checked;
 const passed = outcomes.reduce((sum, one) => sum + one.passed, 0);
 const failed = outcomes.reduce((sum, one) => sum + one.failed, 0);
 const broken = outcomes.some((one) => one.broken);

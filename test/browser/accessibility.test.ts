@@ -1,12 +1,8 @@
 import { readFileSync } from 'node:fs';
-import { afterAll, beforeAll, expect, it } from 'vitest';
-import { openSite, type Site } from './site.ts';
-
-let site: Site;
-beforeAll(async () => {
-  site = await openSite();
-});
-afterAll(() => site.close());
+import type { Page } from 'playwright-core';
+import { describe, expect, it } from 'vitest';
+import { openSite } from './site.ts';
+import { oneStudyPage, settled } from './studyPage.ts';
 
 const axe = readFileSync('node_modules/axe-core/axe.min.js', 'utf8');
 
@@ -16,16 +12,9 @@ interface Found {
   readonly nodes: { readonly target: unknown }[];
 }
 
-it.each([
-  ['option-study.html', 1440],
-  ['option-study.html', 400],
-  ['span-chart.html', 1440],
-  ['index.html', 1440],
-])('%s at %i px has no serious fault of accessibility', async (path, width) => {
-  const { page } = await site.open(path, { width, height: 900 });
-  await page.waitForSelector(path.startsWith('option') ? '[data-option]' : '.cell', { timeout: 60_000 });
-  // The checker is evaluated by the test, past the page's content policy.
-  const faults = await page
+/** Serious faults of what is on the page, by the checker, which the test evaluates past the page's content policy. */
+async function faultsOf(page: Page): Promise<unknown[]> {
+  const found = await page
     .evaluate(async (source) => {
       (0, eval)(source);
       const checker = (window as unknown as { axe: { run(): Promise<{ violations: Found[] }> } }).axe;
@@ -37,5 +26,24 @@ it.each([
       }));
     }, axe)
     .catch((error: unknown) => [{ id: 'not run', impact: 'serious', at: [String(error)] }]);
-  expect(faults.filter(({ impact }) => impact === 'serious' || impact === 'critical')).toEqual([]);
+  return found.filter(({ impact }) => impact === 'serious' || impact === 'critical');
+}
+
+it.each(['span-chart.html', 'index.html'])('%s has no serious fault of accessibility', async (path) => {
+  const site = await openSite();
+  const { page } = await site.open(path);
+  await page.waitForSelector('.cell', { timeout: 60_000 });
+  expect(await faultsOf(page)).toEqual([]);
+  await site.close();
+});
+
+describe('the option study', () => {
+  const study = oneStudyPage();
+
+  it.each([400, 1440])('at %i px has no serious fault of accessibility', async (width) => {
+    const { page } = study;
+    await page.setViewportSize({ width, height: 900 });
+    await settled(page);
+    expect(await faultsOf(page)).toEqual([]);
+  });
 });

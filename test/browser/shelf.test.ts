@@ -1,11 +1,8 @@
 import { readFile } from 'node:fs/promises';
-import { resolve } from 'node:path';
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { openSite, type Site } from './site.ts';
-import { settled, silent } from './studyPage.ts';
-
-const example = resolve(import.meta.dirname, '../../data/examples/low-ferry.json');
+import { exampleOf, settled, silent } from './studyPage.ts';
 
 let site: Site;
 beforeAll(async () => {
@@ -17,7 +14,7 @@ const rows = (page: Page): Promise<string[]> => page.locator('.study .title').al
 
 /** Opens a file from the shelf and comes back to the shelf. */
 async function bring(page: Page, title: string): Promise<void> {
-  const study = JSON.parse(await readFile(example, 'utf8')) as object;
+  const study = exampleOf(['composite-i', 'concrete-box']);
   const chooser = page.waitForEvent('filechooser');
   await page.getByRole('button', { name: 'Open a file' }).click();
   await (
