@@ -41,6 +41,8 @@ const schema = z.strictObject({
   strand: z.record(z.enum(standardIds), strand),
   stay: cable,
   mainCable: cable,
+  /** Cylinder strengths that the laws of `concrete` are for. */
+  concreteMPa: z.strictObject({ leastMPa: positive, mostMPa: positive, source: z.string() }),
   /** Oven-dry densities it may have, and what they do to weight, stiffness and strength under each standard. */
   lightConcrete: z.strictObject({ leastKgM3: positive, mostKgM3: positive, lm1: light, hl93: light }),
   /** Cylinder strengths taken when nothing is said, MPa. */

@@ -1,4 +1,3 @@
-import { materials } from '../actions/index.ts';
 import { leastCostDepth } from '../appraise/leastCostDepth.ts';
 import { depthRange } from '../appraise/depthRange.ts';
 import { finish } from '../appraise/work.ts';
@@ -25,6 +24,7 @@ const flagNames = [
   'radius',
   'loading',
   'girders',
+  'box-width',
   'strength',
   'light',
   'light-middles',
@@ -52,70 +52,69 @@ function oneOf<T extends string>(
   return undefined;
 }
 
-/** One number for each span, or a problem added to the list; undefined when the flag is absent. */
-function bySpan(
-  flags: Flags,
-  name: string,
-  spansM: readonly number[],
-  { most, unit }: { readonly most: (span: number) => number; readonly unit: string },
-  problems: Problem[],
-): number[] | undefined {
+/** Numbers with commas between, or a problem added to the list; undefined when the flag is absent. */
+function numbersFlag(flags: Flags, name: string, problems: Problem[]): number[] | undefined {
   const text = flags.values[name];
   if (text === undefined) return undefined;
   const values = text.split(',').map((part) => (part.trim() === '' ? NaN : Number(part)));
-  if (values.length === spansM.length && values.every((value, span) => value >= 0 && value <= most(span)))
-    return values;
+  if (!values.some(Number.isNaN)) return values;
   problems.push({
-    code: values.some(Number.isNaN) ? 'wrong-type' : 'outside',
+    code: 'wrong-type',
     path: [`--${name}`],
-    expected: `a number for each of ${spansM.length} spans: ${spansM.map((_, span) => `0 to ${most(span)}`).join(', ')}`,
+    expected: 'a number for each span with commas between',
     received: text,
-    unit,
-    remedy: `give --${name} with commas between, 0 for a span without`,
+    remedy: `give --${name} like 0,90,0, 0 for a span without`,
   });
   return undefined;
 }
 
-/** What a concrete box is made of besides the usual: strength, lightweight concrete, ballast. */
-function concreteOf(
-  flags: Flags,
-  form: FormId | undefined,
-  spansM: readonly number[],
-  problems: Problem[],
-): Pick<UnitTask, 'strengthMPa' | 'light' | 'ballastKNm'> {
-  const names = ['strength', 'light', 'light-middles', 'ballast'] as const;
-  const given = names.filter((name) => flags.values[name] !== undefined);
-  if (form && given.length > 0 && !formModule(form).readsConcrete)
-    problems.push({
-      code: 'unknown-key',
-      path: [`--${given[0]!}`],
-      expected: `a form that reads it: ${sizeableForms.filter((id) => formModule(id).readsConcrete).join(', ')}`,
-      received: form,
-      remedy: `leave --${given.join(' and --')} out`,
-    });
-  if ((flags.values['light'] === undefined) !== (flags.values['light-middles'] === undefined))
-    needFlags(flags, ['light', 'light-middles'], problems);
-  const { leastKgM3, mostKgM3 } = materials.lightConcrete;
-  const strengthMPa = numberFlag(flags, 'strength', { above: 20, most: 90, unit: 'MPa' }, problems);
-  const densityKgM3 = numberFlag(
-    flags,
-    'light',
-    { above: leastKgM3, most: mostKgM3, unit: 'kg/m3' },
-    problems,
-  );
-  const middleM = bySpan(
-    flags,
-    'light-middles',
-    spansM,
-    { most: (span) => spansM[span]!, unit: 'm' },
-    problems,
-  );
-  const ballastKNm = bySpan(flags, 'ballast', spansM, { most: () => 2000, unit: 'kN/m' }, problems);
+/** Flags that ask for a choice of a form, by the choice. */
+const choiceFlags = {
+  boxWidthM: ['box-width'],
+  strengthMPa: ['strength'],
+  light: ['light', 'light-middles'],
+  ballastKNm: ['ballast'],
+} as const;
+type ChosenHere = keyof typeof choiceFlags;
+
+/** What is asked of a concrete box besides the usual: its width, strength, lightweight concrete, ballast. */
+function choicesOf(flags: Flags, form: FormId | undefined, problems: Problem[]): Pick<UnitTask, ChosenHere> {
+  const has = (id: FormId, choice: ChosenHere): boolean => formModule(id).choices?.includes(choice) === true;
+  for (const [choice, names] of Object.entries(choiceFlags) as [ChosenHere, readonly string[]][]) {
+    const given = names.filter((name) => flags.values[name] !== undefined);
+    if (form && given.length > 0 && !has(form, choice))
+      problems.push({
+        code: 'unknown-key',
+        path: [`--${given[0]!}`],
+        expected: `a form that reads it: ${sizeableForms.filter((id) => has(id, choice)).join(', ')}`,
+        received: form,
+        remedy: `leave --${given.join(' and --')} out`,
+      });
+  }
+  if (flags.values['light-middles'] !== undefined) needFlags(flags, ['light'], problems);
+  const positive = (name: string, unit: string): number | undefined =>
+    numberFlag(flags, name, { above: 0, unit }, problems);
+  const boxWidthM = positive('box-width', 'm');
+  const strengthMPa = positive('strength', 'MPa');
+  const densityKgM3 = positive('light', 'kg/m3');
+  const middleM = numbersFlag(flags, 'light-middles', problems);
+  const ballastKNm = numbersFlag(flags, 'ballast', problems);
   return {
+    ...(boxWidthM === undefined ? {} : { boxWidthM }),
     ...(strengthMPa === undefined ? {} : { strengthMPa }),
-    ...(densityKgM3 === undefined || middleM === undefined ? {} : { light: { densityKgM3, middleM } }),
+    ...(densityKgM3 === undefined
+      ? {}
+      : { light: { densityKgM3, ...(middleM === undefined ? {} : { middleM }) } }),
     ...(ballastKNm === undefined ? {} : { ballastKNm }),
   };
+}
+
+/** A fault of a form at the flag that asked for it. */
+function atFlag(fault: Problem): Problem {
+  const [choice, ...rest] = fault.path;
+  const names: readonly string[] = choiceFlags[choice as ChosenHere];
+  const name = names.at(rest[0] === 'middleM' ? 1 : 0)!;
+  return { ...fault, path: [`--${name}`, ...rest.filter((step) => typeof step === 'number')] };
 }
 
 function spansOf(flags: Flags, problems: Problem[]): number[] {
@@ -172,7 +171,7 @@ function readTask(argv: readonly string[]): Asked {
     standardIds,
     problems,
   );
-  const concrete = concreteOf(flags, form, spansM, problems);
+  const choices = choicesOf(flags, form, problems);
   needFlags(flags, ['width', 'lanes'], problems);
   if (widthM !== undefined && carriagewayM !== undefined && !(carriagewayM > 0 && carriagewayM <= widthM)) {
     problems.push({
@@ -205,21 +204,20 @@ function readTask(argv: readonly string[]): Asked {
   const lane: DeckStrip = { kind: 'lane', widthM: kerbToKerb / lanes, ultimateWidthM: kerbToKerb / lanes };
   const strips = [edge, ...Array.from({ length: lanes }, () => lane), edge];
   const module = formModule(form);
-  return {
-    depthM,
-    haunch,
-    task: {
-      form,
-      spansM,
-      deck: deckSpec(strips, SURFACING_M, standard),
-      standard,
-      planRadiusM,
-      method: module.methods[0],
-      ...(girders === undefined ? {} : { girders }),
-      ...concrete,
-      ...(module.pattern.kind === 'pylon' ? { pylons: pylonsOf(spansM) } : {}),
-    },
+  const task: Asked['task'] = {
+    form,
+    spansM,
+    deck: deckSpec(strips, SURFACING_M, standard),
+    standard,
+    planRadiusM,
+    method: module.methods[0],
+    ...(girders === undefined ? {} : { girders }),
+    ...choices,
+    ...(module.pattern.kind === 'pylon' ? { pylons: pylonsOf(spansM) } : {}),
   };
+  const faults = module.faults?.(task) ?? [];
+  if (faults.length > 0) refuse(faults.map(atFlag));
+  return { depthM, haunch, task };
 }
 
 /** The task at a midspan depth, deeper over the piers where that was asked for. */
@@ -246,8 +244,9 @@ function depthSought(asked: Asked): number {
 
 /**
  * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
- * Without a depth the one of least cost in the published band is taken. Concrete boxes read `--strength` (MPa), `--light`
- * (oven-dry density, kg/m3) with `--light-middles` (length about the middle of each span, m), and `--ballast` (kN/m by span).
+ * Without a depth the one of least cost in the published band is taken. Concrete boxes read `--box-width`
+ * (between the axes of the outer webs, m), `--strength` (MPa), `--light` (oven-dry density, kg/m3; with `--light-middles`
+ * only a length about the middle of each span, m), and `--ballast` (kN/m by span).
  */
 export function sizeCommand(argv: readonly string[]): Said {
   const asked = readTask(argv);

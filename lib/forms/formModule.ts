@@ -5,6 +5,7 @@ import type {
   FormId,
   MethodId,
   Pattern,
+  Problem,
   UnitTask,
   Variant,
 } from '../model/index.ts';
@@ -30,10 +31,10 @@ export interface FormModule {
   readonly ignoresHeight?: true;
   /** Inner supports are walls in one with the deck: `strikes` of its task is read. */
   readonly wallsInOne?: true;
-  /** Strength, lightweight concrete and ballast of its task are read. */
-  readonly readsConcrete?: true;
   /** Of the choices of a variant those that the form has. */
   readonly choices?: readonly (keyof Variant)[];
+  /** Why a unit cannot be made as its choices ask, by paths of a variant; absent where nothing can be asked amiss. */
+  faults?(task: Omit<UnitTask, 'depthM'>): readonly Problem[];
   /**
    * Other ways of making a unit than the plain one that are worth pricing for its spans (m), deck and method; absent where
    * the form leaves no choice.

@@ -31,7 +31,7 @@ export function placeOf(path: readonly (string | number)[]): string {
   );
 }
 
-const unitSuffix = /(?<=[a-z])(M|T|Deg|KNm|KN|KNM2|Kg|M2|M3)$/u;
+const unitSuffix = /(?<=[a-z])(M|T|Deg|KNm|KN|KNM2|Kg|KgM3|M2|M3|MPa)$/u;
 
 /** Trade word for the field a problem is about: `headroomM` becomes 'headroom', `toM` of a zone stays 'to'. */
 function subjectOf(path: readonly (string | number)[]): string {

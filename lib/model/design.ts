@@ -1,5 +1,6 @@
 import type { BillPart, FormId, MethodId, StandardId } from './ids.ts';
 import type { DeckSpec } from './site.ts';
+import type { LightConcreteAsked } from './variant.ts';
 
 /** What a form is asked to size: one unit of a crossing (or one bench case), without any knowledge of the site. */
 export interface UnitTask {
@@ -23,10 +24,12 @@ export interface UnitTask {
   readonly transverse?: true;
   /** Concrete boxes: inclined struts under the wings of the top slab, so that fewer cells carry the deck. */
   readonly struts?: true;
+  /** Concrete boxes: between the axes of the outer webs at the top, m; in a fixed proportion to the deck when absent. */
+  readonly boxWidthM?: number;
   /** Concrete boxes: cylinder strength of the concrete, MPa; the usual one of the standard when absent. */
   readonly strengthMPa?: number;
-  /** Concrete boxes: lightweight concrete about the middles of spans; none when absent. */
-  readonly light?: LightMiddles;
+  /** Concrete boxes: lightweight concrete; none when absent. */
+  readonly light?: LightConcreteAsked;
   /** Concrete boxes: ballast in the cells by span, kN per m of deck, laid on the joined deck; none when absent. */
   readonly ballastKNm?: readonly number[];
   /** Thickness of an orthotropic deck plate, m, where it is given; by wheels and surfacing when absent. */
@@ -44,14 +47,6 @@ export interface Strike {
   readonly alongKN: number;
   readonly acrossKN: number;
   readonly aboveGroundM: number;
-}
-
-/** Lightweight concrete of a deck. */
-export interface LightMiddles {
-  /** Oven-dry density, kg/m3. */
-  readonly densityKgM3: number;
-  /** By span: length about its middle that is made of it, m. */
-  readonly middleM: readonly number[];
 }
 
 /** Depth law of haunched girders. */

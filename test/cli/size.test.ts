@@ -52,10 +52,13 @@ describe('size', () => {
   });
 
   it.each([
-    ['--light 1900', /light-middles/],
-    ['--light 900 --light-middles 0,20,0', /light: expected a number above 1400/],
-    ['--light 1900 --light-middles 0,120,0', /light-middles: expected .*0 to 65, 0 to 110, 0 to 65/],
+    ['--light-middles 0,20,0', /light: expected .*--light/],
+    ['--light 900 --light-middles 0,20,0', /light: expected 1400 to 2200 kg\/m3/],
+    ['--light 1900 --light-middles 0,120,0', /light-middles, entry 2: expected 0 to 110 m, received 120 m/],
     ['--ballast 30,30', /ballast: expected a number for each of 3 spans/],
+    ['--ballast 30,x,30', /ballast: expected a number for each span/],
+    ['--strength 900', /strength: expected 20 to 90 MPa, received 900 MPa/],
+    ['--box-width 11.5', /box-width: expected 2.5 to 11.1 m, received 11.5 m/],
   ])('size(cantilever-box %s) is refused', (flags, said) => {
     const line = `--form cantilever-box --spans 65,110,65 --width 12 --lanes 3 --depth 3 ${flags}`;
     const printed = answer(sizeCommand, line);

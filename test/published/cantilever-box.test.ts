@@ -112,9 +112,8 @@ describe('the longest cantilevered boxes', () => {
       }),
     );
 
-  // Missed: gravel of 18 kN/m3 fills the cells of the 72 m span half as much again as they hold. Our webs stand 4.7 m apart
-  // by the usual overhang, the box that was built is 7 m wide; its piers are cast in and share the couple (from memory), here
-  // the abutment takes it alone.
+  // Our webs stand 4.7 m apart by the usual overhang: gravel of 18 kN/m3 fills the cells of the 72 m span half as much again
+  // as they hold.
   it('holds with the spans of Stolma and its depth at midspan, but for the room of its ballast', () => {
     const design = stolma();
     for (const { id, utilisation } of design.checks)
@@ -125,6 +124,20 @@ describe('the longest cantilevered boxes', () => {
     expect(design.depthM.support).toBeLessThanOrEqual(
       depthBand('cantilever-box', 'continuous')[1] * 301 + 1e-9,
     );
+  });
+
+  // Missed: the box that was built is 7 m wide (published, read), 6.6 m between webs of 0.4 m. It is heavier, asks for more
+  // ballast, and that lacks a tenth of its room; the tendons of the arms lack 3 %. Its piers are cast in and share the couple
+  // (from memory), here the abutment takes it alone.
+  it('comes within a tenth of holding with the box of Stolma as wide as it was built', () => {
+    const built = stolma({ boxWidthM: 6.6, ballastKNm: [400, 0, 850] });
+    expect(built.figures['webSpacingM']).toBe(6.6);
+    for (const { id, utilisation } of built.checks)
+      if (id !== 'ballast-room' && id !== 'service-top') expect(utilisation, id).toBeLessThanOrEqual(1.0001);
+    expect(built.limitingCheck.id).toBe('ballast-room');
+    expect(built.limitingCheck.utilisation).toBeLessThan(1.1);
+    const roomOf = ({ checks }: Design): number => checks.find(({ id }) => id === 'ballast-room')!.capacity;
+    expect(roomOf(built) / roomOf(stolma())).toBeGreaterThan(1.3);
   });
 
   it('does not hold without its ballast, nor in C50 of ordinary weight', () => {

@@ -3,7 +3,8 @@ import { midspanDepthBand } from '../../rules/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { overLimit } from '../common/warnings.ts';
-import { wideBoxVariants } from '../concrete-box/boxVariants.ts';
+import { boxFaults, checkBoxTask } from '../concrete-box/boxFaults.ts';
+import { boxChoices, wideBoxVariants } from '../concrete-box/boxVariants.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
 import { choosePierDepth } from './choosePierDepth.ts';
@@ -29,16 +30,17 @@ export const cantileverBox: FormModule = {
     { kind: 'flanked', approach: 'composite-i', side: [0.55, 0.7] },
   ],
   methods: ['balanced-cantilever'],
-  readsConcrete: true,
-  choices: ['transverse', 'struts'],
+  choices: boxChoices,
+  faults: boxFaults,
   variants: (spansM, deck, method) =>
     wideBoxVariants(spansM, deck, method, midspanDepthBand('cantilever-box')![1]),
   size,
 };
 
-/** @throws RangeError for spans, depth or widths that are not possible */
+/** @throws RangeError for spans, depth, widths or concrete that are not possible */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
+  checkBoxTask(task);
   const { model, box, checks } = choosePierDepth(task);
   const reactions = haunchedReactions(model, box);
   const warnings = [...overLimit(checks, 'tendons and concrete'), ...haunchedWarnings(model, box, reactions)];

@@ -22,7 +22,8 @@ export interface Words<I extends Inputs> {
 
 /**
  * What a figure hangs on, in short: `spans`, figures of the unit by name (`pier*HogDesignKNm` is all of them), its
- * steel lines (`steel`), paths of the unit (`./task/depthM`), any other path; `:standard` is the load standard.
+ * steel lines (`steel`), paths of the unit (`./task/depthM`; `./task/light?` only where the task has it), any other path;
+ * `:standard` is the load standard.
  */
 export type Short = string;
 
@@ -40,10 +41,22 @@ export const steelLinesOf = (at: At): string[] =>
     line.item.endsWith('-steel') ? [`${at.unit}/lines/${i}/quantity`] : [],
   );
 
+/** Whether the task of a unit has what a path names, `./task/light/middleM`. */
+function asked(at: At, short: Short): boolean {
+  const steps = short.split('/').slice(2);
+  return (
+    steps.reduce<unknown>(
+      (held, step) => (held as Record<string, unknown> | undefined)?.[step],
+      at.design.task,
+    ) !== undefined
+  );
+}
+
 /** Paths of the figures a short name stands for. */
 function pathsOf(at: At, short: Short): string[] {
   if (short === 'spans') return spansOf(at);
   if (short === 'steel') return steelLinesOf(at);
+  if (short.endsWith('?')) return asked(at, short.slice(0, -1)) ? pathsOf(at, short.slice(0, -1)) : [];
   if (short.startsWith('./')) return [`${at.unit}${short.slice(1)}`];
   if (short.includes('/')) return [short.replace(':standard', at.design.task.standard)];
   const [start = '', end] = short.split('*');

@@ -12,7 +12,7 @@ import { measured } from '../common/measured.ts';
 import { supportPositions } from '../common/supports.ts';
 import { boxData } from './boxData.ts';
 
-/** What a box is made of: ordinary concrete, and lightweight concrete about the middles of some spans. */
+/** What a box is made of: ordinary concrete, and lightweight concrete about the middles of some spans or in all of it. */
 export interface BoxConcrete {
   readonly concrete: Concrete;
   readonly light: LightConcrete | null;
@@ -23,38 +23,17 @@ export interface BoxConcrete {
 /** A model that has the concrete of its box. */
 type Made = BoxConcrete & { readonly task: UnitTask };
 
-/**
- * The concrete that a task asks for.
- * @throws RangeError for a strength that is not positive, a density out of range, and lengths or ballast that do not fit the spans
- */
+/** The concrete that a task asks for; what it asks is checked before, see `boxFaults`. */
 export function boxConcrete({
   standard,
   spansM,
   strengthMPa = materials.concreteDefaultMPa[standard].box,
   light,
-  ballastKNm,
-  method,
 }: UnitTask): BoxConcrete {
-  for (const [name, values] of [
-    ['light.middleM', light?.middleM],
-    ['ballastKNm', ballastKNm],
-  ] as const)
-    if (values && !(values.length === spansM.length && values.every((value) => value >= 0)))
-      throw new RangeError(
-        `${name}: expected 0 or more for each of ${spansM.length} spans, received ${values.join(', ')}`,
-      );
-  if (light && method === 'launch')
-    throw new RangeError(
-      'light: expected a deck that is cast in its place, received one that is launched; lightweight concrete is not followed over the launching piers',
-    );
   const ordinary = concrete(standard, strengthMPa);
   if (!light) return { concrete: ordinary, light: null, lightShare: () => 0 };
   const supportsM = supportPositions(spansM);
-  const stretches = light.middleM.map((lengthM, span) => {
-    if (lengthM > spansM[span]!)
-      throw new RangeError(
-        `light.middleM[${span}]: expected at most the span of ${spansM[span]} m, received ${lengthM} m`,
-      );
+  const stretches = (light.middleM ?? spansM).map((lengthM, span) => {
     const middleM = supportsM[span]! + spansM[span]! / 2;
     return [middleM - lengthM / 2, middleM + lengthM / 2] as const;
   });

@@ -6,8 +6,8 @@ const source = z.string().min(1);
 const number = z.number();
 
 const schema = z.object({
-  layout: z.object({ overhangOverSpacing: number, mostWebSpacingM: number, source }),
-  ballast: z.object({ weightKNm3: number, source }),
+  layout: z.object({ overhangOverSpacing: number, mostWebSpacingM: number, leastBoxM: number, source }),
+  ballast: z.object({ weightKNm3: number, mostKNm: number, source }),
   across: z.object({
     mostWebSpacingM: number,
     axisM: number,

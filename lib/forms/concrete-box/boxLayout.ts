@@ -4,7 +4,7 @@ import { designSlab, type SlabDesign } from '../common/slab/designSlab.ts';
 import type { SlabCase } from '../common/slab/slabCase.ts';
 import { acrossSlab } from './acrossSlab.ts';
 import { boxData } from './boxData.ts';
-import { strutPlan } from './strutPlan.ts';
+import { cellsWithin, mostSpacingM, strutPlan, type StrutPlan } from './strutPlan.ts';
 import { designStruts, type Struts } from './struts.ts';
 
 /** Cells and webs of a box, and its top slab. */
@@ -26,24 +26,22 @@ export interface BoxLayout {
 
 /** Cells of a box under a top slab with or without tendons across the deck. */
 export function cellsFor(widthM: number, hasTendonsAcross: boolean): number {
-  const { overhangOverSpacing, mostWebSpacingM } = boxData.layout;
-  const mostM = hasTendonsAcross ? boxData.across.mostWebSpacingM : mostWebSpacingM;
-  return Math.max(1, Math.ceil(widthM / mostM - 2 * overhangOverSpacing - 1e-9));
+  const { overhangOverSpacing } = boxData.layout;
+  return Math.max(1, Math.ceil(widthM / mostSpacingM(hasTendonsAcross) - 2 * overhangOverSpacing - 1e-9));
 }
 
 /**
  * As few cells as keep the webs within the practical spacing of a slab, plain or with tendons across the deck, overhangs in
- * a fixed proportion to it, outer webs leaning inwards, and the top slab designed across the webs and, where the wings have
+ * a fixed proportion to it or as the width asked of the box leaves them, outer webs leaning inwards, and the top slab designed across the webs and, where the wings have
  * them, their struts.
  * @param deepestM greatest depth of the box, m; `depthM` of the task is the least
  */
 export function boxLayout(task: UnitTask, deepestM = task.depthM): BoxLayout {
-  const { overhangOverSpacing } = boxData.layout;
-  const { deck, depthM, standard } = task;
+  const { deck, depthM, standard, boxWidthM } = task;
   const across = task.transverse === true;
   const plan = task.struts
-    ? strutPlan(deck.widthM, depthM, across)
-    : plainPlan(deck.widthM, cellsFor(deck.widthM, across), overhangOverSpacing);
+    ? strutPlan(deck.widthM, depthM, across, boxWidthM)
+    : plainPlan(deck.widthM, across, boxWidthM);
   const { cells, spacingM, overhangM } = plan;
   const slabCase: SlabCase = {
     standard,
@@ -67,11 +65,13 @@ export function boxLayout(task: UnitTask, deepestM = task.depthM): BoxLayout {
   return { ...base, ...tied, struts: designStruts({ ...strutCase, slab: tied.slab }) };
 }
 
-function plainPlan(
-  widthM: number,
-  cells: number,
-  overhangOverSpacing: number,
-): Omit<ReturnType<typeof strutPlan>, 'outM'> & { readonly outM: 0 } {
+function plainPlan(widthM: number, hasTendonsAcross: boolean, boxWidthM: number | undefined): StrutPlan {
+  if (boxWidthM !== undefined) {
+    const within = cellsWithin(boxWidthM, hasTendonsAcross);
+    return { ...within, outM: 0, overhangM: (widthM - boxWidthM) / 2 };
+  }
+  const { overhangOverSpacing } = boxData.layout;
+  const cells = cellsFor(widthM, hasTendonsAcross);
   const spacingM = widthM / (cells + 2 * overhangOverSpacing);
   return { cells, spacingM, outM: 0, overhangM: overhangOverSpacing * spacingM };
 }

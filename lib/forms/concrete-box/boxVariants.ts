@@ -2,6 +2,16 @@ import type { DeckSpec, MethodId, Variant } from '../../model/index.ts';
 import { cellsFor } from './boxLayout.ts';
 import { strutPlan } from './strutPlan.ts';
 
+/** What can be chosen of a concrete box. */
+export const boxChoices = [
+  'transverse',
+  'struts',
+  'boxWidthM',
+  'strengthMPa',
+  'light',
+  'ballastKNm',
+] as const satisfies readonly (keyof Variant)[];
+
 /** Ways of making a concrete box besides a plain top slab: tendons across it, where they save a cell. */
 export function boxVariants(_spansM: readonly number[], { widthM }: DeckSpec): readonly Variant[] {
   return cellsFor(widthM, true) < cellsFor(widthM, false) ? [{ transverse: true }] : [];

@@ -34,6 +34,12 @@ const concreteLines = (at: At): string[] => [
   ...linesOf(at, 'struts under the wings'),
 ];
 
+/** The width that is asked of the box, where one is; what strut heads lie beyond the webs, where it has them. */
+const askedWidth = (at: At): string[] =>
+  at.design.task.boxWidthM === undefined ? [] : [`${at.unit}/task/boxWidthM`];
+const outOf = (at: At): string[] =>
+  at.design.figures['strutsOutM'] === undefined ? [] : [`${at.unit}/figures/strutsOutM`];
+
 /** Concrete box: section and quantities of the whole deck, its tendons, its checks. */
 export const boxFigures: readonly Descriptor[] = [
   sized(
@@ -42,6 +48,7 @@ export const boxFigures: readonly Descriptor[] = [
     'no',
     'as few as keep the webs within their practical spacing, which is wider where tendons run across the slab; struts carry the wings in their stead where it has them',
     './task/deck/widthM',
+    './task/boxWidthM?',
     'data/concrete-box/layout/mostWebSpacingM',
     'data/concrete-box/across/mostWebSpacingM',
     'data/concrete-box/layout/overhangOverSpacing',
@@ -59,25 +66,29 @@ export const boxFigures: readonly Descriptor[] = [
     unit: 'm',
     method: 'layout',
     formula:
-      'deck width, less twice what strut heads lie beyond the webs / (cells + 2 x overhang over spacing)',
+      'width asked of the box / cells; where none is, deck width, less twice what strut heads lie beyond the webs / (cells + 2 x overhang over spacing)',
     inputs: (at) => ({
+      asked: askedWidth(at),
       width: `${at.unit}/task/deck/widthM`,
-      out: at.design.figures['strutsOutM'] === undefined ? [] : [`${at.unit}/figures/strutsOutM`],
+      out: outOf(at),
       cells: `${at.unit}/figures/cells`,
       ratio: 'data/concrete-box/layout/overhangOverSpacing',
     }),
-    compute: ({ width, out, cells, ratio }) => (width - 2 * sum(out)) / (cells + 2 * ratio),
+    compute: ({ asked, width, out, cells, ratio }) =>
+      asked.length > 0 ? sum(asked) / cells : (width - 2 * sum(out)) / (cells + 2 * ratio),
   }),
   figure('overhangM', {
     label: 'overhang beyond the outer web, or beyond its strut heads',
     unit: 'm',
-    method: 'product',
-    formula: 'overhang over spacing x spacing of the webs',
+    method: 'layout',
+    formula: '(deck width - cells x spacing of the webs) / 2, less what strut heads lie beyond the webs',
     inputs: (at) => ({
-      ratio: 'data/concrete-box/layout/overhangOverSpacing',
+      width: `${at.unit}/task/deck/widthM`,
+      out: outOf(at),
+      cells: `${at.unit}/figures/cells`,
       spacing: `${at.unit}/figures/webSpacingM`,
     }),
-    compute: ({ ratio, spacing }) => ratio * spacing,
+    compute: ({ width, out, cells, spacing }) => (width - cells * spacing) / 2 - sum(out),
   }),
   ...(
     [

@@ -10,7 +10,8 @@ import { boxElevation, boxSections } from './boxDrawing.ts';
 import { boxFigures, boxReactions, ownWeightShare } from './boxReport.ts';
 import { boxLines } from './boxLines.ts';
 import { boxModel } from './boxModel.ts';
-import { wideBoxVariants } from './boxVariants.ts';
+import { boxFaults, checkBoxTask } from './boxFaults.ts';
+import { boxChoices, wideBoxVariants } from './boxVariants.ts';
 import { heightUnder } from './heightUnder.ts';
 import { sizeBox } from './sizeBox.ts';
 
@@ -25,8 +26,8 @@ export const concreteBox: FormModule = {
   name: 'Concrete box',
   pattern: { kind: 'continuous' },
   methods: ['falsework', 'launch'],
-  readsConcrete: true,
-  choices: ['transverse', 'struts'],
+  choices: boxChoices,
+  faults: boxFaults,
   variants: (spansM, deck, method) =>
     wideBoxVariants(
       spansM,
@@ -37,9 +38,10 @@ export const concreteBox: FormModule = {
   size,
 };
 
-/** @throws RangeError for spans, depth or widths that are not possible */
+/** @throws RangeError for spans, depth, widths or concrete that are not possible */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
+  checkBoxTask(task);
   const model = boxModel(task);
   const box = sizeBox(model);
   const checks = boxChecks(model, box);
