@@ -4,7 +4,8 @@ import { depthRange } from './depthRange.ts';
 import { leastCostDepth, type DepthTrial } from './leastCostDepth.ts';
 import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
-import { depthsOf, mainUnit, spansOf, trialAt, workOptionAt, type Worked } from './workOption.ts';
+import { spansOf } from './askedTask.ts';
+import { depthsOf, mainUnit, trialAt, workOptionAt, type Worked } from './workOption.ts';
 
 /** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
 const OVER_DECK_ALONE = 1.15;

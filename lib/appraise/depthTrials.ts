@@ -1,7 +1,8 @@
 import type { AppraisedOption, Option, Study } from '../model/index.ts';
 import { survey } from '../site/index.ts';
 import { depthRange } from './depthRange.ts';
-import { mainUnit, spansOf } from './workOption.ts';
+import { spansOf } from './askedTask.ts';
+import { mainUnit } from './workOption.ts';
 
 /** Depths shown on either side of the one an option has. */
 const EACH_SIDE = 4;

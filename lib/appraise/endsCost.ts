@@ -7,7 +7,7 @@ import { profileOrNearest } from './profileOrNearest.ts';
 import { PIER_PERMANENT } from './trialPiers.ts';
 import type { FormAndMethod } from './trialRows.ts';
 import type { Workbench } from './workbench.ts';
-import { spansOf } from './workOption.ts';
+import { spansOf } from './askedTask.ts';
 
 /**
  * What the cost table leaves out because it is the same for every bridge between two abutments, money at mean rates: the

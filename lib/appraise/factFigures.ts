@@ -5,7 +5,8 @@ import { methodFactFigures } from './methodFactFigures.ts';
 import { regradingFactFigures } from './regradingFigures.ts';
 import { riverFactFigures } from './riverFactFigures.ts';
 import { supportFactFigures } from './supportFactFigures.ts';
-import { mainUnit, spansOf } from './workOption.ts';
+import { spansOf } from './askedTask.ts';
+import { mainUnit } from './workOption.ts';
 
 const main = (at: At): number => at.option.units.indexOf(mainUnit(at.option.units));
 const design = (at: At): string => `${at.root}/designs/${main(at)}`;

@@ -7,7 +7,8 @@ import { crossedFacts, methodFacts } from './methodFacts.ts';
 import { regradingFacts } from './regradingFacts.ts';
 import { riverFacts } from './riverFacts.ts';
 import { supportFacts } from './supportFacts.ts';
-import { mainUnit, spansOf } from './workOption.ts';
+import { spansOf } from './askedTask.ts';
+import { mainUnit } from './workOption.ts';
 
 type Known = Record<string, Facts[string]>;
 

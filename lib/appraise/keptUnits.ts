@@ -1,6 +1,8 @@
 import { formModule } from '../forms/index.ts';
 import { abutmentWindows } from '../site/index.ts';
-import type { KeptOption, Site, Unit } from '../model/index.ts';
+import { sentences } from '../messages/index.ts';
+import type { KeptOption, Site, Unit, UnitTask } from '../model/index.ts';
+import { askedTask } from './askedTask.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 
 export const BEYOND_ABUTMENT = 'a support would stand beyond an abutment';
@@ -41,10 +43,16 @@ function unsizeable({ form, supportsM, pylons = [] }: Unit): string | null {
     : `${name}: one or two pylons on inner supports expected`;
 }
 
+/** Why a unit cannot be made as its choices ask. */
+function amiss(task: Omit<UnitTask, 'depthM'>): string[] {
+  const form = formModule(task.form);
+  return sentences(form.faults?.(task) ?? []).map((text) => `${form.name}: ${text}`);
+}
+
 /** Units of an option kept by hand on the crossing as it is now, or why it cannot be worked out at all. */
 export function keptUnits(
   site: Site,
-  { form, units, variant = {} }: Pick<KeptOption, 'form' | 'units' | 'variant'>,
+  { form, method, units, variant = {} }: Pick<KeptOption, 'form' | 'method' | 'units' | 'variant'>,
 ): { readonly units: readonly Unit[] } | { readonly because: readonly string[] } {
   const placed = between(site, units);
   if (placed === null) return { because: [BEYOND_ABUTMENT] };
@@ -54,6 +62,9 @@ export function keptUnits(
   if (foreign.length > 0) {
     const has = choices.length === 0 ? 'it is made in one way only' : `it has ${choices.join(', ')}`;
     because.push(`${name}: ${foreign.join(', ')} cannot be chosen; ${has}`);
+  } else {
+    for (const unit of placed)
+      if (unit.role === 'main') because.push(...amiss(askedTask(site, { method, variant }, unit)));
   }
   return because.length > 0 ? { because } : { units: placed };
 }

@@ -2,7 +2,8 @@ import type { At, Descriptor } from '../model/index.ts';
 import { girderLines } from '../takeoff/index.ts';
 import { asIs, fact, factOf } from './factFigure.ts';
 import { halfDeckNeeded, spansOffWater } from './methodFacts.ts';
-import { mainUnit, spansOf } from './workOption.ts';
+import { spansOf } from './askedTask.ts';
+import { mainUnit } from './workOption.ts';
 
 const zones = (at: At, ...kinds: readonly string[]): string[] =>
   at.site.zones.flatMap(({ kind }, i) =>

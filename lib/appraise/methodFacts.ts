@@ -4,7 +4,8 @@ import { girderLines } from '../takeoff/index.ts';
 import { erectionData } from './erectionData.ts';
 import { launchYardNeeded } from './launchYardNeeded.ts';
 import { pickRadius } from './pickRadius.ts';
-import { depthAlong, mainUnit, spansOf } from './workOption.ts';
+import { spansOf } from './askedTask.ts';
+import { depthAlong, mainUnit } from './workOption.ts';
 
 type Known = Record<string, Facts[string]>;
 

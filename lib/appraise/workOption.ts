@@ -21,15 +21,11 @@ import {
 } from '../substructure/index.ts';
 import { measure } from '../takeoff/index.ts';
 import { remembered } from '../kept.ts';
+import { askedTask, spansOf } from './askedTask.ts';
 import type { DepthTrial } from './leastCostDepth.ts';
 import type { AtDepth } from './memory.ts';
 import { profileOrNearest } from './profileOrNearest.ts';
 import type { Workbench } from './workbench.ts';
-
-/** Spans of a unit, m. */
-export function spansOf(unit: Unit): number[] {
-  return unit.supportsM.slice(1).map((x, i) => x - unit.supportsM[i]!);
-}
 
 /** The unit a form was chosen for; a crossing of one unit has only that. */
 export function mainUnit(units: readonly Unit[]): Unit {
@@ -54,19 +50,10 @@ const STEPS = 20;
 /** Heights under the deck, m, are told apart to this: a unit is not sized anew for a centimetre of ground. */
 const CLEAR_CLASS_M = 0.25;
 
-/** What a variant asks of the task of a unit at a depth, m. */
-function madeAs(
-  { haunchRatio, substringers, transverse, struts }: Variant = {},
-  depthM: number,
-): Pick<UnitTask, 'haunch' | 'substringers' | 'transverse' | 'struts'> {
-  return {
-    ...(haunchRatio === undefined
-      ? {}
-      : { haunch: { pierDepthM: Math.round(haunchRatio * depthM * STEPS) / STEPS, law: 'parabolic' } }),
-    ...(substringers ? { substringers } : {}),
-    ...(transverse ? { transverse } : {}),
-    ...(struts ? { struts } : {}),
-  };
+/** Depth over the inner supports of a haunched unit at a depth at midspan, m. */
+function haunchOf({ haunchRatio }: Variant = {}, depthM: number): Pick<UnitTask, 'haunch'> {
+  if (haunchRatio === undefined) return {};
+  return { haunch: { pierDepthM: Math.round(haunchRatio * depthM * STEPS) / STEPS, law: 'parabolic' } };
 }
 
 function taskOf(
@@ -81,15 +68,9 @@ function taskOf(
   const clear = (x: number): number =>
     Math.max(0, roadLevelAt(profile, x) - constructionDepth(site.deck, depthM) - groundAt(site, x));
   return {
-    form: unit.form,
-    method: unit.role === 'main' ? option.method : module.methods[0],
-    spansM: spansOf(unit),
-    deck: site.deck,
-    standard: site.standard,
-    planRadiusM: site.planRadiusM ?? Infinity,
+    ...askedTask(site, option, unit),
     depthM,
-    ...(unit.role === 'main' ? madeAs(option.variant, depthM) : {}),
-    ...(unit.pylons ? { pylons: unit.pylons } : {}),
+    ...(unit.role === 'main' ? haunchOf(option.variant, depthM) : {}),
     ...(module.ignoresHeight
       ? {}
       : { clearUnderM: unit.supportsM.map((x) => Math.round(clear(x) / CLEAR_CLASS_M) * CLEAR_CLASS_M) }),

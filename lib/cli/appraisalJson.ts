@@ -1,4 +1,4 @@
-import { spansOf } from '../appraise/workOption.ts';
+import { spansOf } from '../appraise/askedTask.ts';
 import type { Appraisal, AppraisedOption } from '../model/index.ts';
 import { rounded } from './rounded.ts';
 

@@ -6,6 +6,19 @@ const unit = (steps: string): string => `options/:option/designs/:unit/${steps}`
 const path = 'options/:option/variant/haunchRatio';
 const label = 'depth over the inner supports over that at midspan';
 
+/** Figures of a variant that a unit is asked for as they stand: steps, label and unit. */
+const asGiven = [
+  ['boxWidthM', 'width asked of the box between the axes of its outer webs', 'm'],
+  ['strengthMPa', 'strength asked of the concrete', 'MPa'],
+  ['light/densityKgM3', 'oven-dry density of the lightweight concrete', 'kg/m3'],
+  ['light/middleM/:s', 'length of lightweight concrete about the middle of a span', 'm'],
+  ['ballastKNm/:s', 'ballast of a span', 'kN/m'],
+] as const;
+
+/** Steps of such a figure at a place, `light/middleM/1`. */
+const filled = (steps: string, at: At): string =>
+  steps.includes(':s') ? steps.replace(':s', at.name('s')) : steps;
+
 /** How the main unit of an option is made where its form leaves a choice, and what the haunched unit is sized for. */
 export const variantFigures: readonly Descriptor[] = [
   described({
@@ -30,6 +43,26 @@ export const variantFigures: readonly Descriptor[] = [
       from: `data/${at.option.form}/haunch/fromSpanM`,
     }),
   }),
+  ...asGiven.flatMap(([steps, what, unitOf]) => [
+    described({
+      path: `options/:option/variant/${steps}`,
+      label: what,
+      unit: unitOf,
+      method: 'set by hand',
+      formula: 'as typed',
+      inputs: (at) => ({ typed: `kept/${kept(at)}/variant/${filled(steps, at)}` }),
+      compute: ({ typed }) => typed,
+    }),
+    described({
+      path: unit(`task/${steps}`),
+      label: what,
+      unit: unitOf,
+      method: 'as asked',
+      formula: 'choice of the option for its main unit',
+      inputs: (at) => ({ asked: `${at.root}/variant/${filled(steps, at)}` }),
+      compute: ({ asked }) => asked,
+    }),
+  ]),
   described({
     path: unit('task/haunch/pierDepthM'),
     label: 'structural depth asked for over the inner supports',

@@ -188,6 +188,15 @@ export const studyFigures: readonly Descriptor[] = [
   ),
   typed('kept/:i/depthM', 'depth typed for the option', 'm'),
   typed('kept/:i/variant/haunchRatio', 'depth over the piers over that at midspan, typed for the option', ''),
+  ...(
+    [
+      ['boxWidthM', 'width of the box', 'm'],
+      ['strengthMPa', 'strength of the concrete', 'MPa'],
+      ['light/densityKgM3', 'oven-dry density of the lightweight concrete', 'kg/m3'],
+      ['light/middleM/:s', 'length of lightweight concrete about the middle of a span', 'm'],
+      ['ballastKNm/:s', 'ballast of a span', 'kN/m'],
+    ] as const
+  ).map(([steps, label, unit]) => typed(`kept/:i/variant/${steps}`, `${label}, asked for the option`, unit)),
   typed(
     'kept/:i/units/:unit/supportsM/:s',
     (at) => `chainage of support ${at.index('s') + 1}, set by hand`,

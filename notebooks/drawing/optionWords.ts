@@ -1,6 +1,6 @@
-import { chainage, length, level } from '../format.ts';
+import { chainage, fixed, length, level } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
-import type { AppraisedOption, Design, FormId, Site } from '../model.ts';
+import type { AppraisedOption, Design, FormId, Site, Variant } from '../model.ts';
 import { spansOf, roadTop, structureTop } from './alongOption.ts';
 
 /** Whether an option's main unit is deeper at its supports than at midspan. */
@@ -26,15 +26,40 @@ export function optionTitle(option: AppraisedOption): string {
   return [look.name, ...(isHaunched(option) && !haunchSaid ? ['haunched'] : []), ...beside].join(', ');
 }
 
+/** How an option is made where that is not the plain way, besides a haunch: its depths say that. */
+function madeWords({
+  substringers,
+  transverse,
+  struts,
+  boxWidthM,
+  strengthMPa,
+  light,
+  ballastKNm = [],
+}: Variant): string[] {
+  return [
+    ...(substringers ? ['substringers between the girders'] : []),
+    ...(transverse ? ['top slab prestressed across'] : []),
+    ...(struts ? ['wings on struts'] : []),
+    ...(boxWidthM === undefined ? [] : [`box ${level(boxWidthM)} m wide between its webs`]),
+    ...(strengthMPa === undefined ? [] : [`concrete of ${fixed(strengthMPa, 0)} MPa`]),
+    ...(light === undefined
+      ? []
+      : [
+          `lightweight concrete of ${fixed(light.densityKgM3, 0)} kg/m³${light.middleM ? ' about the middles of spans' : ''}`,
+        ]),
+    ...(ballastKNm.some((kNm) => kNm > 0) ? ['ballast in its cells'] : []),
+  ];
+}
+
 /** What is worth knowing of an option beside its spans: its depth, what stands above the road, how the road moves. */
 export function optionNote(site: Site, option: AppraisedOption): string {
   const { support, midspan } = option.depthM;
   const depth = isHaunched(option)
     ? `${level(midspan)} m at midspan, ${level(support)} m at ${onWalls(option.designs) ? 'walls' : 'piers'}`
     : `${level(midspan)} m deep`;
-  const beams = option.variant?.substringers ? ', substringers between the girders' : '';
-  const across = option.variant?.transverse ? ', top slab prestressed across' : '';
-  const struts = option.variant?.struts ? ', wings on struts' : '';
+  const made = madeWords(option.variant ?? {})
+    .map((words) => `, ${words}`)
+    .join('');
   const above = structureTop(site, option) - roadTop(site, option);
   const tall = above > 4 ? `, ${length(Math.round(above))} m above the road` : '';
   const rise = Math.max(option.profile.startRiseM, option.profile.endRiseM);
@@ -44,7 +69,7 @@ export function optionNote(site: Site, option: AppraisedOption): string {
     option.startM === undefined || option.endM === undefined
       ? ''
       : `${length(option.endM - option.startM)} m long from ${chainage(option.startM)} to ${chainage(option.endM)}, `;
-  return `${from}${depth}${beams}${across}${struts}${tall}${moved}`;
+  return `${from}${depth}${made}${tall}${moved}`;
 }
 
 /** Index of the longest span, which is printed bold. */

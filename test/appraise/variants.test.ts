@@ -5,7 +5,7 @@ import { memory } from '../../lib/appraise/memory.ts';
 import { finish } from '../../lib/appraise/work.ts';
 import { workbench, type Workbench } from '../../lib/appraise/workbench.ts';
 import { girderVariants } from '../../lib/forms/composite-i/girderVariants.ts';
-import { appraiseKept, survey, type Option, type Study, type Variant } from '../../lib/index.ts';
+import { appraiseKept, survey, type Design, type Option, type Study, type Variant } from '../../lib/index.ts';
 import { expectedLines } from '../../lib/substructure/index.ts';
 import { lowFerry } from './studies.ts';
 import { answerTo } from './answerTo.ts';
@@ -63,6 +63,12 @@ const optionOn = (mainM: number, variant?: Variant): Option => ({
   ...(variant && { variant }),
 });
 
+const boxOn = (mainM: number, variant?: Variant): Option => {
+  const { units, ...rest } = optionOn(mainM, variant);
+  const boxes = units.map((unit) => ({ ...unit, form: 'concrete-box' as const }));
+  return { ...rest, form: 'concrete-box', method: 'falsework', units: boxes };
+};
+
 const workOut = (bench: Workbench, mainM: number, variant?: Variant) => {
   const { option } = finish(workOption(bench, optionOn(mainM, variant)));
   const foundations = option.supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
@@ -106,12 +112,6 @@ describe('workOption(option whose way of making is open)', () => {
 });
 
 describe('workOption(wide concrete box whose way of making is open)', () => {
-  const boxOn = (mainM: number, variant?: Variant): Option => {
-    const { units, ...rest } = optionOn(mainM, variant);
-    const boxes = units.map((unit) => ({ ...unit, form: 'concrete-box' as const }));
-    return { ...rest, form: 'concrete-box', method: 'falsework', units: boxes };
-  };
-
   it('rests the wings on struts where they pay', () => {
     const bench = workbench(channel(6, 75));
     const { option } = finish(workOption(bench, boxOn(75)));
@@ -142,14 +142,63 @@ describe('workOption(variant that was chosen)', () => {
     expect(Math.max(...design!.depthAlong.depthM)).toBeCloseTo(option.depthM.support, 9);
   });
 
+  const boxAsked: Variant = {
+    boxWidthM: 5,
+    strengthMPa: 60,
+    light: { densityKgM3: 1800 },
+    ballastKNm: [5, 0, 0, 5],
+  };
+
+  it('makes a box as wide, strong and light as asked, and pays lightweight concrete at its own rate', () => {
+    const bench = workbench(channel(2, 60));
+    const asked = finish(workOption(bench, boxOn(60, boxAsked))).option;
+    const usual = finish(
+      workOption(bench, boxOn(60, { ...boxAsked, light: { densityKgM3: 1800, middleM: [0, 0, 0, 0] } })),
+    ).option;
+    const [light, ordinary] = [asked.designs[0]!, usual.designs[0]!];
+    expect(light.task).toMatchObject(boxAsked);
+    expect(light.figures).toMatchObject({ webSpacingM: 5, concreteStrengthMPa: 60 });
+    // All of the box but its diaphragms and blisters is of lightweight concrete.
+    const items = (design: Design): string[] => design.lines.map(({ item }) => item);
+    expect(items(light)).toContain('light-concrete');
+    expect(light.lines.some(({ what }) => what === 'box')).toBe(false);
+    expect(items(ordinary)).not.toContain('light-concrete');
+    const permanent = (design: Design): number =>
+      design.reactions.reduce((sum, { permanentKN }) => sum + permanentKN, 0);
+    expect(permanent(light)).toBeLessThan(permanent(ordinary));
+    const [line] = light.lines.filter(({ item }) => item === 'light-concrete');
+    expect(bench.costOf([line!])).toBeGreaterThan(bench.costOf([{ ...line!, item: 'box-concrete' }]));
+  });
+
+  it.each([
+    [{ boxWidthM: 40 }, /Concrete box: box width: expected 2.5 to [\d.]+ m, received 40 m/u],
+    [{ strengthMPa: 120 }, /strength: expected 20 to 90 MPa, received 120 MPa/u],
+    [{ light: { densityKgM3: 2400 } }, /density: expected 1400 to 2200 kg\/m3/u],
+    [{ light: { densityKgM3: 1800, middleM: [10, 20] } }, /a number for each of 1 spans, received 2/u],
+    [{ ballastKNm: [10, 10] }, /ballast: expected a number for each of 1 spans, received 2/u],
+  ] as const)('is refused with the number where its spans do not allow it: %o', (variant, said) => {
+    const site = survey(lowFerry().brief);
+    const units = [{ form: 'concrete-box', role: 'main', supportsM: [site.startM, site.endM] }] as const;
+    expect(keptUnits(site, { form: 'concrete-box', method: 'falsework', units, variant })).toMatchObject({
+      because: [expect.stringMatching(said)],
+    });
+  });
+
   it('is refused where the form has none', () => {
     const study = lowFerry();
     const site = survey(study.brief);
     const { startM, endM } = site;
     const units = [{ form: 'concrete-box', role: 'main', supportsM: [startM, endM] }] as const;
-    const placed = keptUnits(site, { form: 'concrete-box', units, variant: { haunchRatio: 2 } });
+    const placed = keptUnits(site, {
+      form: 'concrete-box',
+      method: 'falsework',
+      units,
+      variant: { haunchRatio: 2 },
+    });
     expect(placed).toMatchObject({
-      because: [expect.stringMatching(/haunchRatio cannot be chosen; it has transverse, struts/u)],
+      because: [
+        expect.stringMatching(/haunchRatio cannot be chosen; it has transverse, struts, boxWidthM,/u),
+      ],
     });
   });
 });

@@ -233,6 +233,12 @@ export const variants = (): Context =>
           kept(41, 'concrete-box', { transverse: true }),
           kept(42, 'concrete-box', { struts: true }),
           kept(43, 'cantilever-box', { struts: true }),
+          kept(44, 'concrete-box', { boxWidthM: 9, light: { densityKgM3: 1800 } }),
+          kept(45, 'cantilever-box', {
+            strengthMPa: 60,
+            light: { densityKgM3: 1900, middleM: [0, 60, 0] },
+            ballastKNm: [20, 0, 30],
+          }),
         ],
       },
     };

@@ -212,6 +212,21 @@ describe('readStudy', () => {
       'options.register[1].number',
     ],
     [
+      'ballast that holds up',
+      (s) =>
+        (s['options']!['kept'] = set([
+          {
+            number: 1,
+            form: 'cantilever-box',
+            method: 'balanced-cantilever',
+            units: [{ form: 'cantilever-box', role: 'main', supportsM: [1240, 1300, 1400, 1470] }],
+            variant: { boxWidthM: 6, ballastKNm: [100, -1, 0] },
+          },
+        ])),
+      'too-small',
+      'options.kept[0].variant.ballastKNm[1]',
+    ],
+    [
       'units that do not join',
       (s) =>
         (s['options']!['kept'] = set([

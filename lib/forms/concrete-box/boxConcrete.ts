@@ -102,10 +102,10 @@ export function madeLines(made: Made, xM: Float64Array, areaM2: Float64Array): M
     lines.push(
       measured(
         'deck',
-        'box-concrete',
+        'light-concrete',
         lightM3(made, xM, areaM2),
         'box of lightweight concrete',
-        `${task.light!.densityKgM3} kg/m3 oven-dry about the middles of spans, at the rate of ordinary concrete: there is no rate of its own`,
+        `${task.light!.densityKgM3} kg/m3 oven-dry${task.light!.middleM ? ' about the middles of spans' : ''}, placed`,
       ),
     );
   const kN = ballastKN(task);

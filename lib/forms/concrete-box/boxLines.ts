@@ -75,7 +75,7 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
     ),
   );
   if (task.method !== 'launch') lines.push(falsework(model));
-  return lines;
+  return lines.filter(({ quantity }) => quantity > 0);
 }
 
 /** Tendons across the top slab, where it has them. */
@@ -106,7 +106,7 @@ export function strutLines(
   return [
     measured(
       'deck',
-      'precast-concrete',
+      'wing-strut',
       concreteM3,
       'struts under the wings',
       `2 rows every ${spacingM} m, ${mm(sideM)} mm square`,

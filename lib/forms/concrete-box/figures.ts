@@ -31,7 +31,7 @@ const itemLines = (at: At, item: string, what: readonly string[]): string[] =>
 
 const concreteLines = (at: At): string[] => [
   ...itemLines(at, 'box-concrete', concrete),
-  ...linesOf(at, 'struts under the wings'),
+  ...linesOf(at, 'box of lightweight concrete', 'struts under the wings'),
 ];
 
 /** The width that is asked of the box, where one is; what strut heads lie beyond the webs, where it has them. */
@@ -250,7 +250,10 @@ export const boxFigures: readonly Descriptor[] = [
     unit: 'm3',
     method: 'share',
     formula: 'share x box',
-    inputs: (at) => ({ share: 'data/concrete-box/blisters/share', box: linesOf(at, 'box') }),
+    inputs: (at) => ({
+      share: 'data/concrete-box/blisters/share',
+      box: linesOf(at, 'box', 'box of lightweight concrete'),
+    }),
     compute: ({ share, box }) => share * sum(box),
   }),
   ...boxCheckFigures,

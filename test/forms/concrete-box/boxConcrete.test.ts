@@ -88,7 +88,7 @@ describe.each([
     const { lightM3, lightWeightKNm3 } = lighter.figures;
     expect(lightM3).toBeGreaterThan(0);
     const all = lighter.lines
-      .filter(({ item, what }) => item === 'box-concrete' && what !== 'box of lightweight concrete')
+      .filter(({ item }) => item === 'box-concrete')
       .reduce((sum, { quantity }) => sum + quantity, 0);
     const laid = lighter.task.deck.superimposedKNm * lighter.task.spansM.reduce((sum, x) => sum + x, 0);
     const blisters =

@@ -1,0 +1,28 @@
+import { formModule } from '../forms/index.ts';
+import type { Option, Site, Unit, UnitTask } from '../model/index.ts';
+
+/** Spans of a unit, m. */
+export function spansOf(unit: Unit): number[] {
+  return unit.supportsM.slice(1).map((x, i) => x - unit.supportsM[i]!);
+}
+
+/** What a unit of an option is asked to be, but for its depth and what it stands over. */
+export function askedTask(
+  site: Site,
+  { method, variant = {} }: Pick<Option, 'method' | 'variant'>,
+  unit: Unit,
+): Omit<UnitTask, 'depthM'> {
+  const isMain = unit.role === 'main';
+  // A ratio of depths is one only beside a depth.
+  const { haunchRatio: _depths, ...choices } = variant;
+  return {
+    form: unit.form,
+    method: isMain ? method : formModule(unit.form).methods[0],
+    spansM: spansOf(unit),
+    deck: site.deck,
+    standard: site.standard,
+    planRadiusM: site.planRadiusM ?? Infinity,
+    ...(isMain ? choices : {}),
+    ...(unit.pylons ? { pylons: unit.pylons } : {}),
+  };
+}

@@ -1,0 +1,20 @@
+import { expect, it } from 'vitest';
+import { optionNote } from '../../notebooks/drawing/optionWords.ts';
+import { example } from '../explain/contexts.ts';
+
+it('optionNote(option) says how a box is made where it is not the usual way', () => {
+  const { appraisal } = example();
+  const [option] = appraisal.options;
+  const note = (variant: object): string => optionNote(appraisal.site, { ...option!, variant });
+  const asked = note({
+    boxWidthM: 6.6,
+    strengthMPa: 60,
+    light: { densityKgM3: 1863, middleM: [0, 60, 0] },
+    ballastKNm: [20, 0, 0],
+  });
+  expect(asked).toMatch(
+    /, box 6.60 m wide between its webs, concrete of 60 MPa, lightweight concrete of 1\u2009863 kg\/m³ about the middles of spans, ballast in its cells/u,
+  );
+  expect(note({ light: { densityKgM3: 1800 }, ballastKNm: [0] })).not.toMatch(/middles|ballast/u);
+  expect(note({})).not.toMatch(/concrete|box/u);
+});
