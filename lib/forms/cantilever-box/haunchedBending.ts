@@ -1,6 +1,7 @@
 import { bendingCapacity, blockDepth, faceBarsM2 } from '../concrete-box/bendingCapacity.ts';
 import type { BendingUse } from '../concrete-box/ultimateBending.ts';
 import { cantileverData } from './cantileverData.ts';
+import { betweenZeros, workingWidthM } from '../concrete-box/shearLag.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { FoundStrands } from './findStrands.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
@@ -27,6 +28,7 @@ export function haunchedBending(
   const { layout, task } = model;
   const { coverM: topCover } = cantileverData.topTendons;
   const { coverM: lowCover } = cantileverData.bottomTendons;
+  const flangeWidthM = workingWidthM(layout, betweenZeros(task.spansM).inSpanM);
   const n = sections.areaM2.length;
   let [sag, hog, stage] = [nil, nil, nil];
   for (let i = 0; i < n; i++) {
@@ -43,7 +45,7 @@ export function haunchedBending(
           barM2: faceBarsM2(widthM),
           barDepthM: depth - lowCover / 2,
         },
-        { widthM: task.deck.widthM, flangeM: layout.slab.meanM, websM },
+        { widthM: flangeWidthM, flangeM: layout.slab.meanM, websM },
       );
       sag = worse(sag, sagging, capacity, i);
     }

@@ -78,7 +78,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
-    ...(layout.struts ? strutFigures(layout.struts) : {}),
+    ...strutFigures(layout, task.spansM),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,

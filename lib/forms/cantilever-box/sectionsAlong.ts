@@ -4,6 +4,8 @@ import { polygonProperties } from '../../mechanics/index.ts';
 import type { Outline } from '../concrete-box/boxOutline.ts';
 import { boxSection, type BoxSection } from '../concrete-box/boxSection.ts';
 import type { Thicknesses } from '../concrete-box/sectionsAlong.ts';
+import type { BoxLayout } from '../concrete-box/boxLayout.ts';
+import { betweenZeros, lagOf } from '../concrete-box/shearLag.ts';
 import { cantileverData } from './cantileverData.ts';
 import { holdsDown, type CantileverModel } from './cantileverModel.ts';
 import { haunchShare } from './haunch.ts';
@@ -59,6 +61,9 @@ export interface HaunchedSections {
   readonly topM: Float64Array;
   readonly lowM: Float64Array;
   readonly bottomWidthM: Float64Array;
+  /** What shear lag makes of the bending stress at the top and at the soffit. */
+  readonly topLag: Float64Array;
+  readonly lowLag: Float64Array;
   /** Sections at the knots of every arm. */
   readonly atKnots: readonly (readonly BoxSection[])[];
   /** Area along every arm, by way from its pier, m2. */
@@ -98,10 +103,15 @@ type Numbers = readonly [
   top: number,
   low: number,
   width: number,
+  topLag: number,
+  lowLag: number,
 ];
+const numberCount = 9;
 
-function numbersOf(s: BoxSection): Numbers {
-  return [s.webM, s.bottomM, s.areaM2, s.inertiaM4, s.topM, s.lowM, s.bottomWidthM];
+/** @param zerosM length between points of no moment there, m */
+function numbersOf(layout: BoxLayout, s: BoxSection, zerosM: number): Numbers {
+  const { top, low } = lagOf(layout, s, zerosM);
+  return [s.webM, s.bottomM, s.areaM2, s.inertiaM4, s.topM, s.lowM, s.bottomWidthM, top, low];
 }
 
 /** Sections at knots of each arm, properties straight between them; webs thicken again beside the abutments. */
@@ -122,6 +132,11 @@ export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses)
     string,
     { readonly at: readonly BoxSection[]; readonly numbers: readonly Numbers[] }
   >();
+  const zeros = betweenZeros(task.spansM);
+  // Half of an inner span is an arm: its first two fifths are the fifth of the span beside the pier.
+  const zerosAt = (way: number): number =>
+    zeros.inSpanM +
+    Math.max(0, 1 - way / (2 * boxData.pierZone.overSpan)) * (zeros.overPierM - zeros.inSpanM);
   const onArms = arms.map(({ support, span }) => {
     const depthM = depthsM.get(support)!;
     const { webM, bottomM } = middleOf(t, span);
@@ -136,16 +151,20 @@ export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses)
           bottomM + (t.pierBottomM - bottomM) * slabShare(way),
         ),
       );
-      known = { at: sections, numbers: sections.map(numbersOf) };
+      known = {
+        at: sections,
+        numbers: sections.map((section, k) => numbersOf(layout, section, zerosAt(knots[k]!))),
+      };
       made.set(key, known);
     }
     pierAt.set(support, known.at[0]!);
     return known;
   });
   const n = beam.xM.length;
-  const arrays = Array.from({ length: 7 }, () => new Float64Array(n));
-  const mids = middles.map(numbersOf);
-  const abutments = ends.map(numbersOf);
+  const arrays = Array.from({ length: numberCount }, () => new Float64Array(n));
+  const inSpan = (section: BoxSection): Numbers => numbersOf(layout, section, zeros.inSpanM);
+  const mids = middles.map(inSpan);
+  const abutments = ends.map(inSpan);
   for (let i = 0; i < n; i++) {
     const arm = model.armAt[i]!;
     const numbers = arm >= 0 ? onArms[arm]!.numbers : mids;
@@ -154,7 +173,7 @@ export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses)
     const isFirst = 2 * beam.xM[i]! < model.lengthM;
     const abutment = abutments[isFirst ? 0 : 1]!;
     const mid = mids[isFirst ? 0 : last]!;
-    for (let j = 0; j < 7; j++) {
+    for (let j = 0; j < numberCount; j++) {
       const near = numbers[k]![j]!;
       const far = numbers[k + 1]?.[j] ?? near;
       arrays[j]![i] = near + share * (far - near) + atEnd * (abutment[j]! - mid[j]!);
@@ -174,6 +193,8 @@ export function haunchedSections(model: CantileverModel, t: HaunchedThicknesses)
     topM: arrays[4]!,
     lowM: arrays[5]!,
     bottomWidthM: arrays[6]!,
+    topLag: arrays[7]!,
+    lowLag: arrays[8]!,
     atKnots: onArms.map(({ at }) => at),
     armAreaM2: onArms.map(({ numbers }) => (way: number): number => {
       const [k, share] = between(way);

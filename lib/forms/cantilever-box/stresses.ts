@@ -42,8 +42,8 @@ export function haunchedStresses(
   const owns = [weight.openKNm, weight.lastingKNm] as const;
   for (let i = 0; i < n; i++) {
     const area = sections.areaM2[i]!;
-    const lowW = sections.inertiaM4[i]! / sections.lowM[i]!;
-    const topW = sections.inertiaM4[i]! / sections.topM[i]!;
+    const lowW = sections.inertiaM4[i]! / (sections.lowM[i]! * sections.lowLag[i]!);
+    const topW = sections.inertiaM4[i]! / (sections.topM[i]! * sections.topLag[i]!);
     const et = sections.topM[i]! - cantileverData.topTendons.coverM;
     const eb = sections.lowM[i]! - cantileverData.bottomTendons.coverM;
     const soffit = model.armAt[i]! >= 0 && model.way[i]! < 0.5 ? 'pierSoffit' : 'spanSoffit';

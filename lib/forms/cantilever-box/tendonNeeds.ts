@@ -4,6 +4,7 @@ import { boxData } from '../concrete-box/boxData.ts';
 import type { TendonStress } from '../concrete-box/tendonForce.ts';
 import { cantileverData } from './cantileverData.ts';
 import { parasiticKNm } from './parasitic.ts';
+import { betweenZeros, workingWidthM } from '../concrete-box/shearLag.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
 import { creepShare, type StagedWeight } from './stages.ts';
@@ -188,20 +189,22 @@ export function strandsNeeded(
   const designKN = strandDesignMPa(model) * model.strandM2 * 1e3;
   const bars = barDesignMPa(model.standardId) * 1e3;
   const topBars = bars * faceBarsM2(model.task.deck.widthM);
+  const flangeWidthM = workingWidthM(model.layout, betweenZeros(model.task.spansM).inSpanM);
   for (let i = 0; i < n; i++) {
     const area = sections.areaM2[i]!;
     const inertia = sections.inertiaM4[i]!;
     const et = sections.topM[i]! - topCover;
     const eb = sections.lowM[i]! - lowCover;
-    const yt = Math.min(sections.topM[i]!, et + around) / inertia;
-    const yb = Math.min(sections.lowM[i]!, eb + around) / inertia;
+    const topLag = sections.topLag[i]!;
+    const yt = (topLag * Math.min(sections.topM[i]!, et + around)) / inertia;
+    const yb = (sections.lowLag[i]! * Math.min(sections.lowM[i]!, eb + around)) / inertia;
     const nt = before.top[i]!;
     const nb = before.bottom[i]!;
     const pt = before.parasiticTopKNm[i]!;
     const pb = before.parasiticBottomKNm[i]!;
     const stage = weight.cantileverKNm[i]!;
     if (stage < 0) {
-      const y = sections.topM[i]! / inertia;
+      const y = (topLag * sections.topM[i]!) / inertia;
       const perKN = spread * (1 / area + et * y);
       top[i] = Math.max(0, (-stage * y - stageTension) / (perKN * open.topKN));
     }
@@ -230,7 +233,7 @@ export function strandsNeeded(
     }
     const sag = ultimate.max;
     if (sag > 0) {
-      const face = { widthM: model.task.deck.widthM, flangeM: model.layout.slab.meanM, websM };
+      const face = { widthM: flangeWidthM, flangeM: model.layout.slab.meanM, websM };
       const c = compressionDepth(model, face, nb * designKN + lowBars);
       const rest = sag - lowBars * (depth - lowCover / 2 - c);
       bottom[i] = Math.max(bottom[i]!, rest / (designKN * (depth - lowCover - c)));

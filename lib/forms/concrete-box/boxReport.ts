@@ -2,7 +2,9 @@ import type { SupportReaction } from '../../model/index.ts';
 import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
 import { madeFigures } from './boxConcrete.ts';
+import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
+import { betweenZeros, workingWidthM } from './shearLag.ts';
 import type { SizedBox } from './sizeBox.ts';
 import { strutsM3M, type Struts } from './struts.ts';
 
@@ -61,7 +63,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
-    ...(layout.struts ? strutFigures(layout.struts) : {}),
+    ...strutFigures(layout, task.spansM),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,
@@ -116,10 +118,14 @@ export function strutBarsKg(struts: Struts | undefined, strutsM3: number, length
   return struts ? struts.barsKgM3 * strutsM3 + struts.beamBarsKgM * lengthM : 0;
 }
 
-/** Named figures of the struts of a box. */
-export function strutFigures(struts: Struts): Record<string, number> {
-  const { outM, sideM, lengthM, riseM, forceKN, tie, hangKNm, beamM } = struts;
+/** Named figures of the struts of a box and of the wings on them; none without struts. */
+export function strutFigures(layout: BoxLayout, spansM: readonly number[]): Record<string, number> {
+  if (!layout.struts) return {};
+  const { outM, sideM, lengthM, riseM, forceKN, tie, hangKNm, beamM } = layout.struts;
+  const { inSpanM, overPierM } = betweenZeros(spansM);
   return {
+    workingWidthM: workingWidthM(layout, inSpanM),
+    workingWidthAtPiersM: workingWidthM(layout, overPierM),
     strutsOutM: outM,
     strutRiseM: riseM,
     strutLengthM: lengthM,

@@ -38,7 +38,7 @@ export type StressingTendons = Pick<
  */
 export function boxCompressions(
   model: StressModel,
-  sections: Pick<SectionsAlong, 'areaM2' | 'inertiaM4' | 'topM' | 'lowM'>,
+  sections: Pick<SectionsAlong, 'areaM2' | 'inertiaM4' | 'topM' | 'lowM' | 'topLag' | 'lowLag'>,
   own: Pick<OwnWeight, 'effects'>,
   tendons: StressingTendons,
 ): Compressions {
@@ -60,8 +60,8 @@ export function boxCompressions(
   };
   for (let i = 0; i < sections.areaM2.length; i++) {
     const area = sections.areaM2[i]!;
-    const lowW = sections.inertiaM4[i]! / sections.lowM[i]!;
-    const topW = sections.inertiaM4[i]! / sections.topM[i]!;
+    const lowW = sections.inertiaM4[i]! / (sections.lowM[i]! * sections.lowLag[i]!);
+    const topW = sections.inertiaM4[i]! / (sections.topM[i]! * sections.topLag[i]!);
     const share = tendons.share[i]!;
     // What is left of a unit draped force as a moment about the centroid, sagging positive.
     const arm = tendons.parasiticM[i]! - share * tendons.eccentricityM[i]!;

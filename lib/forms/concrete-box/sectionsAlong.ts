@@ -1,5 +1,6 @@
 import { boxSection, type BoxSection } from './boxSection.ts';
 import type { BoxModel } from './boxModel.ts';
+import { betweenZeros, lagOf, type Lag } from './shearLag.ts';
 
 /** Thicknesses that are sought, m. */
 export interface Thicknesses {
@@ -22,6 +23,9 @@ export interface SectionsAlong {
   /** Top of slab to centroid, and centroid to soffit, m. */
   readonly topM: Float64Array;
   readonly lowM: Float64Array;
+  /** What shear lag makes of the bending stress at the top and at the soffit. */
+  readonly topLag: Float64Array;
+  readonly lowLag: Float64Array;
 }
 
 /** Properties run straight from the span to the supports with the thicknesses. */
@@ -30,6 +34,12 @@ export function sectionsAlong(model: BoxModel, t: Thicknesses): SectionsAlong {
   const span = boxSection(layout, task.depthM, t.webM, t.bottomM);
   const pier = boxSection(layout, task.depthM, t.supportWebM, t.pierBottomM);
   const end = boxSection(layout, task.depthM, t.supportWebM, t.bottomM);
+  const zeros = betweenZeros(task.spansM);
+  const lags = {
+    span: lagOf(layout, span, zeros.inSpanM),
+    pier: lagOf(layout, pier, zeros.overPierM),
+    end: lagOf(layout, end, zeros.inSpanM),
+  };
   const n = pierShare.length;
   const between = (a: number, atPier: number, atEnd: number, i: number): number =>
     a + pierShare[i]! * (atPier - a) + (supportShare[i]! - pierShare[i]!) * (atEnd - a);
@@ -37,9 +47,15 @@ export function sectionsAlong(model: BoxModel, t: Thicknesses): SectionsAlong {
     const values = [pick(span), pick(pier), pick(end)] as const;
     return Float64Array.from({ length: n }, (_, i) => between(...values, i));
   };
+  const lagAlong = (pick: (lag: Lag) => number): Float64Array => {
+    const values = [pick(lags.span), pick(lags.pier), pick(lags.end)] as const;
+    return Float64Array.from({ length: n }, (_, i) => between(...values, i));
+  };
   return {
     span,
     pier,
+    topLag: lagAlong(({ top }) => top),
+    lowLag: lagAlong(({ low }) => low),
     webM: along((section) => section.webM),
     bottomM: along((section) => section.bottomM),
     areaM2: along((section) => section.areaM2),

@@ -13,7 +13,10 @@ export type ServiceModel = Pick<BoxModel, 'standardId' | 'concrete' | 'superimpo
 };
 
 /** Section properties along a deck, and the inertia by which its free curvature is judged. */
-export type ServiceSections = Pick<SectionsAlong, 'areaM2' | 'inertiaM4' | 'topM' | 'lowM'> & {
+export type ServiceSections = Pick<
+  SectionsAlong,
+  'areaM2' | 'inertiaM4' | 'topM' | 'lowM' | 'topLag' | 'lowLag'
+> & {
   readonly span: { readonly inertiaM4: number };
 };
 
@@ -63,8 +66,8 @@ export function serviceNeed(
       const inertia = sections.inertiaM4[i]!;
       const e = eccentricityM[i]!;
       const straight = (spread * straightKN) / area + tension;
-      const down = Math.min(sections.lowM[i]!, e + around) / inertia;
-      const up = Math.min(sections.topM[i]!, around - e) / inertia;
+      const down = (sections.lowLag[i]! * Math.min(sections.lowM[i]!, e + around)) / inertia;
+      const up = (sections.topLag[i]! * Math.min(sections.topM[i]!, around - e)) / inertia;
       const bend = share[i]! * e - parasiticM[i]!;
       const axial = share[i]! / area;
       const lowNeed = (sagging[i]! * down - straight) / (spread * (axial + bend * down));

@@ -3,6 +3,7 @@ import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
+import { betweenZeros, workingWidthM } from './shearLag.ts';
 import { ultimateMoments } from './ultimateMoments.ts';
 
 /** Ultimate bending where it is used most. */
@@ -32,7 +33,8 @@ export function ultimateBending(
 ): [sag: BendingUse, hog: BendingUse] {
   const { down, up } = ultimateMoments(model, own);
   const { layout, task } = model;
-  const top = { widthM: task.deck.widthM, flangeM: layout.slab.meanM };
+  const widthM = workingWidthM(layout, betweenZeros(task.spansM).inSpanM);
+  const top = { widthM, flangeM: layout.slab.meanM };
   const bars = [faceBarsM2(sections.span.bottomWidthM), faceBarsM2(task.deck.widthM)] as const;
   const nil: BendingUse = { use: 0, demandKNm: 0, capacityKNm: 1, station: 0 };
   let sag = nil;

@@ -4,6 +4,7 @@ import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
+import { betweenZeros, workingWidthM } from './shearLag.ts';
 import type { LineNeed } from './serviceNeed.ts';
 import type { TendonShapes } from './tendonShape.ts';
 import { ultimateMoments } from './ultimateMoments.ts';
@@ -28,13 +29,14 @@ export function ultimateNeed(
   const bar = barDesignMPa(model.standardId) * 1e3;
   const straightKN = (straightM2 / 2) * strandDesignMPa(model) * 1e3;
   const bars = [bar * faceBarsM2(sections.span.bottomWidthM), bar * faceBarsM2(task.deck.widthM)] as const;
+  const flangeWidthM = workingWidthM(layout, betweenZeros(task.spansM).inSpanM);
   const n = down.length;
   const fixed = [new Float64Array(n), new Float64Array(n)] as const;
   const block = [new Float64Array(n), new Float64Array(n)] as const;
   for (let i = 0; i < n; i++) {
     const websM = layout.webs * sections.webM[i]!;
     const faces = [
-      { widthM: task.deck.widthM, flangeM: layout.slab.meanM, websM },
+      { widthM: flangeWidthM, flangeM: layout.slab.meanM, websM },
       // Over the piers the slab grows with the compression zone.
       {
         widthM: sections.span.bottomWidthM,

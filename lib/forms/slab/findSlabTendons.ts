@@ -37,6 +37,9 @@ export function sectionsOf(model: SlabModel): ServiceSections & { readonly span:
     inertiaM4: along(({ inertiaM4 }) => inertiaM4),
     topM: along(({ topM }) => topM),
     lowM: along(({ lowM }) => lowM),
+    // A slab of one thickness works in bending over all its width.
+    topLag: along(() => 1),
+    lowLag: along(() => 1),
   };
 }
 

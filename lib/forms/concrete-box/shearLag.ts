@@ -1,0 +1,78 @@
+import { polygonProperties } from '../../mechanics/index.ts';
+import type { BoxLayout } from './boxLayout.ts';
+import type { BoxSection } from './boxSection.ts';
+
+/** What shear lag makes of the bending stress at the top and at the soffit, against a section that works in full: 1 or more. */
+export interface Lag {
+  readonly top: number;
+  readonly low: number;
+}
+
+/** Lengths between points of no moment, m. */
+export interface BetweenZeros {
+  readonly inSpanM: number;
+  readonly overPierM: number;
+}
+
+/**
+ * Lengths between points of no moment about the longest span: 0.85 of an end span, 0.7 of an inner one, all of a single
+ * one; over its piers 0.15 of both spans, the shorter of the two places (EN 1992-1-1 figure 5.2, from memory). Taken under
+ * both standards.
+ */
+export function betweenZeros(spansM: readonly number[]): BetweenZeros {
+  const last = spansM.length - 1;
+  if (last === 0) return { inSpanM: spansM[0]!, overPierM: spansM[0]! };
+  const longest = spansM.indexOf(Math.max(...spansM));
+  const spanM = spansM[longest]!;
+  const besides = [spansM[longest - 1], spansM[longest + 1]].filter((m) => m !== undefined);
+  return {
+    inSpanM: (longest === 0 || longest === last ? 0.85 : 0.7) * spanM,
+    overPierM: 0.15 * (spanM + Math.min(...besides)),
+  };
+}
+
+/** Part of a wing that works in bending, m: 0.2 b + 0.1 l0, at most 0.2 l0 and b (EN 1992-1-1 5.3.2.1, from memory). */
+export function effectiveWingM(wingM: number, zerosM: number): number {
+  return Math.min(wingM, 0.2 * wingM + 0.1 * zerosM, 0.2 * zerosM);
+}
+
+/** Width of the deck that works in bending, m; all of it without wings on struts. */
+export function workingWidthM(layout: BoxLayout, zerosM: number): number {
+  const { cells, spacingM, overhangM, struts } = layout;
+  const wingM = overhangM + (struts?.outM ?? 0);
+  return cells * spacingM + 2 * (struts ? effectiveWingM(wingM, zerosM) : wingM);
+}
+
+/**
+ * Shear lag of wings on struts, which reach far beyond their webs: bending finds the section without what does not work of
+ * them, tendons press on all of it. Plain wings are short and count in full.
+ */
+export function lagOf(layout: BoxLayout, section: BoxSection, zerosM: number): Lag {
+  if (!layout.struts) return { top: 1, low: 1 };
+  const halfM = workingWidthM(layout, zerosM) / 2;
+  const { outer, cells: voids } = section.outline;
+  const working = polygonProperties(within(outer, halfM), voids);
+  const topM = -working.centroidM;
+  return {
+    top: topM / working.inertiaM4 / (section.topM / section.inertiaM4),
+    low: (section.depthM - topM) / working.inertiaM4 / (section.lowM / section.inertiaM4),
+  };
+}
+
+type Point = readonly [y: number, z: number];
+
+/** The part of an outline no further than `halfM` from the middle (Sutherland and Hodgman clipping). */
+function within(outline: readonly Point[], halfM: number): Point[] {
+  return clipped(clipped(outline, 1, halfM), -1, halfM);
+}
+
+function clipped(outline: readonly Point[], side: 1 | -1, halfM: number): Point[] {
+  return outline.flatMap((to, i): Point[] => {
+    const from = outline.at(i - 1)!;
+    const [before, here] = [halfM - side * from[0], halfM - side * to[0]];
+    const crossing: Point[] = [];
+    if (before * here < 0)
+      crossing.push([side * halfM, from[1] + (before / (before - here)) * (to[1] - from[1])]);
+    return here >= 0 ? [...crossing, to] : crossing;
+  });
+}
