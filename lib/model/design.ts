@@ -24,6 +24,8 @@ export interface UnitTask {
   readonly transverse?: true;
   /** Concrete boxes: inclined struts under the wings of the top slab, so that fewer cells carry the deck. */
   readonly struts?: true;
+  /** Concrete boxes: ribs across the deck under the slab, so that fewer cells carry it. */
+  readonly ribs?: true;
   /** Concrete boxes: between the axes of the outer webs at the top, m; in a fixed proportion to the deck when absent. */
   readonly boxWidthM?: number;
   /** Concrete boxes: cylinder strength of the concrete, MPa; the usual one of the standard when absent. */

@@ -6,7 +6,7 @@ export interface LightConcreteAsked {
   readonly middleM?: readonly number[];
 }
 
-/** How the main unit of an option is made where its form leaves a choice; empty = constant depth under a plain slab, of the usual concrete. The search chooses among the first four; the others are asked for. */
+/** How the main unit of an option is made where its form leaves a choice; empty = constant depth under a plain slab, of the usual concrete. The search chooses among the first five; the others are asked for. */
 export interface Variant {
   /** Depth over the inner supports over the depth at midspan, above 1: a parabola between them. */
   readonly haunchRatio?: number;
@@ -16,6 +16,8 @@ export interface Variant {
   readonly transverse?: true;
   /** Inclined struts under the wings of a concrete box, so that fewer cells carry its deck. */
   readonly struts?: true;
+  /** Ribs across the deck under the slab of a concrete box, so that fewer cells carry it. */
+  readonly ribs?: true;
   /** Width of a concrete box between the axes of its outer webs at the top, m. */
   readonly boxWidthM?: number;
   /** Cylinder strength of the concrete of a box, MPa. */

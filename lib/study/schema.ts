@@ -189,6 +189,7 @@ const variant = z.strictObject({
   substringers: z.literal(true).exactOptional(),
   transverse: z.literal(true).exactOptional(),
   struts: z.literal(true).exactOptional(),
+  ribs: z.literal(true).exactOptional(),
   boxWidthM: width.exactOptional(),
   strengthMPa: z.number().positive().max(500).exactOptional(),
   light: z

@@ -31,6 +31,7 @@ function madeWords({
   substringers,
   transverse,
   struts,
+  ribs,
   boxWidthM,
   strengthMPa,
   light,
@@ -40,6 +41,7 @@ function madeWords({
     ...(substringers ? ['substringers between the girders'] : []),
     ...(transverse ? ['top slab prestressed across'] : []),
     ...(struts ? ['wings on struts'] : []),
+    ...(ribs ? ['slab on ribs'] : []),
     ...(boxWidthM === undefined ? [] : [`box ${level(boxWidthM)} m wide between its webs`]),
     ...(strengthMPa === undefined ? [] : [`concrete of ${fixed(strengthMPa, 0)} MPa`]),
     ...(light === undefined

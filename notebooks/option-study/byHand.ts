@@ -72,6 +72,7 @@ function made(option: AppraisedOption, kept: KeptOption | undefined, store: Stud
     ...(variant.substringers ? ['substringers'] : []),
     ...(variant.transverse ? ['tendons across'] : []),
     ...(variant.struts ? ['struts'] : []),
+    ...(variant.ribs ? ['ribs'] : []),
   ].join(' and ');
   return action(`Make it without ${without}`, 'made.plain', () =>
     store.edit((study) => withVariant(study, option, {}), { what: `leaving out ${without}` }),

@@ -197,7 +197,7 @@ describe('workOption(variant that was chosen)', () => {
     });
     expect(placed).toMatchObject({
       because: [
-        expect.stringMatching(/haunchRatio cannot be chosen; it has transverse, struts, boxWidthM,/u),
+        expect.stringMatching(/haunchRatio cannot be chosen; it has transverse, struts, ribs, boxWidthM,/u),
       ],
     });
   });

@@ -15,6 +15,7 @@ it('optionNote(option) says how a box is made where it is not the usual way', ()
   expect(asked).toMatch(
     /, box 6.60 m wide between its webs, concrete of 60 MPa, lightweight concrete of 1\u2009863 kg\/m³ about the middles of spans, ballast in its cells/u,
   );
+  expect(note({ ribs: true })).toContain(', slab on ribs');
   expect(note({ light: { densityKgM3: 1800 }, ballastKNm: [0] })).not.toMatch(/middles|ballast/u);
   expect(note({})).not.toMatch(/concrete|box/u);
 });

@@ -233,6 +233,7 @@ export const variants = (): Context =>
           kept(41, 'concrete-box', { transverse: true }),
           kept(42, 'concrete-box', { struts: true }),
           kept(43, 'cantilever-box', { struts: true }),
+          kept(46, 'concrete-box', { ribs: true }),
           kept(44, 'concrete-box', { boxWidthM: 9, light: { densityKgM3: 1800 } }),
           kept(45, 'cantilever-box', {
             strengthMPa: 60,

@@ -3,6 +3,7 @@ import { formManual } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { acrossFigures } from '../concrete-box/acrossFigures.ts';
 import { concreteFigures } from '../concrete-box/concreteFigures.ts';
+import { ribFigures } from '../concrete-box/ribFigures.ts';
 import { strutFigures } from '../concrete-box/strutFigures.ts';
 import { cantileverCheckFigures } from './checkFigures.ts';
 import { stages, tendons, type Row } from './stageFigures.ts';
@@ -132,4 +133,5 @@ export const cantileverFigures: readonly Descriptor[] = [
   ...acrossFigures(manual),
   ...concreteFigures(manual),
   ...strutFigures(manual),
+  ...ribFigures(manual),
 ];

@@ -6,6 +6,7 @@ import { stiffnessAt } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import type { StressUse } from '../concrete-box/boxStress.ts';
 import type { BendingUse } from '../concrete-box/ultimateBending.ts';
+import { underSlabChecks } from '../concrete-box/underSlab.ts';
 import { tipsM } from './arms.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { Hold } from './heldDown.ts';
@@ -88,7 +89,7 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
     check('inner-height', 'height inside for the forms', boxData.leastInnerM.value, sections.innerM, 'm'),
     deflection(model, sections),
     ...model.layout.slab.checks,
-    ...(model.layout.struts?.checks ?? []),
+    ...underSlabChecks(model.layout),
   ];
 }
 

@@ -2,7 +2,7 @@ import type { SectionCut, Shape } from '../../model/index.ts';
 import { constantDepth, type DepthAlong } from '../common/depthAlong.ts';
 import { deckFace, soffitLine, upright } from '../common/elevation.ts';
 import { boxData } from '../concrete-box/boxData.ts';
-import { cutOf, strutsAlong, strutsOf } from '../concrete-box/boxDrawing.ts';
+import { cutOf, underSlabAlong, underSlabOf } from '../concrete-box/boxDrawing.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
@@ -36,7 +36,7 @@ export function haunchedElevation(model: CantileverModel, box: SizedHaunched): S
     const at = j === 0 ? endM / 2 : j === last ? lengthM - endM / 2 : x;
     shapes.push(upright('diaphragm', 'concrete', depth, at, layout.slab.midM, inner ? pierM : endM));
   });
-  shapes.push(...strutsAlong(layout, depth));
+  shapes.push(...underSlabAlong(layout, depth));
   for (const x of jointsOf(model, box)) shapes.push(upright('segment joint', 'concrete', depth, x, 0, 0.02));
   return shapes;
 }
@@ -77,17 +77,17 @@ function tendons(model: CantileverModel, { found }: SizedHaunched): Shape[] {
 /** Cross-sections at the middle of the longest span and over an inner support beside it. */
 export function haunchedCuts(model: CantileverModel, { sections }: SizedHaunched): SectionCut[] {
   const { spansM, deck } = model.task;
-  const onStruts = (cut: SectionCut, depthM: number): SectionCut => ({
+  const withUnder = (cut: SectionCut, depthM: number): SectionCut => ({
     ...cut,
-    shapes: [...strutsOf(model.layout, depthM), ...cut.shapes],
+    shapes: [...underSlabOf(model.layout, depthM), ...cut.shapes],
   });
   const longest = spansM.indexOf(Math.max(...spansM));
   const middleM = model.supportsM[longest]! + spansM[longest]! / 2;
-  const cuts = [onStruts(cutOf(deck, 'midspan', middleM, sections.midspan), model.task.depthM)];
+  const cuts = [withUnder(cutOf(deck, 'midspan', middleM, sections.midspan), model.task.depthM)];
   if (spansM.length > 1) {
     const pier = longest > 0 ? longest : 1;
     const section = sections.pierAt.get(pier)!;
-    cuts.push(onStruts(cutOf(deck, 'pier', model.supportsM[pier]!, section), section.depthM));
+    cuts.push(withUnder(cutOf(deck, 'pier', model.supportsM[pier]!, section), section.depthM));
   }
   return cuts;
 }

@@ -1,10 +1,10 @@
 import type { MeasuredLine } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
-import { acrossLines, diaphragmForms, strandKg, strutLines } from '../concrete-box/boxLines.ts';
+import { acrossLines, diaphragmForms, strandKg } from '../concrete-box/boxLines.ts';
 import { lightM3, madeLines } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
-import { strutsM3M } from '../concrete-box/struts.ts';
+import { underSlabLines, underSlabM3M } from '../concrete-box/underSlab.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
@@ -29,12 +29,11 @@ export function strandTotalKg(model: CantileverModel, { found }: SizedHaunched):
   return familyKg(model, found.top) + familyKg(model, found.bottom);
 }
 
-/** Concrete of the struts under the wings, m3. */
-export function strutsTotalM3(model: CantileverModel): number {
-  const { struts, slope } = model.layout;
+/** Concrete of struts or ribs under the slab, m3. */
+export function underSlabTotalM3(model: CantileverModel): number {
   return along(
     model,
-    model.depthM.map((depth) => strutsM3M(struts, depth, slope)),
+    model.depthM.map((depth) => underSlabM3M(model.layout, depth)),
   );
 }
 
@@ -94,7 +93,7 @@ export function haunchedLines(model: CantileverModel, box: SizedHaunched): Measu
       `up to ${Math.max(...found.bottom)} strands in the bottom slab, ending towards the supports`,
     ),
     ...acrossLines(model),
-    ...strutLines(model, strutsTotalM3(model)),
+    ...underSlabLines(model, underSlabTotalM3(model)),
     measured(
       'deck',
       'box-formwork',

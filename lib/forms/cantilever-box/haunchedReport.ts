@@ -1,11 +1,12 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { middleStation } from '../common/middleStation.ts';
 import { madeFigures } from '../concrete-box/boxConcrete.ts';
-import { strutBarsKg, strutFigures } from '../concrete-box/boxReport.ts';
+import { underSlabFigures } from '../concrete-box/boxReport.ts';
+import { underSlabBarsKg } from '../concrete-box/underSlab.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
 import { worstHold } from './haunchedChecks.ts';
-import { along, onFalseworkM, strandTotalKg, strutsTotalM3, travellersOf } from './haunchedLines.ts';
+import { along, onFalseworkM, strandTotalKg, underSlabTotalM3, travellersOf } from './haunchedLines.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
 /**
@@ -63,9 +64,9 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
   const { layout, beam, task, traffic, lengthM } = model;
   const { sections, found, weight, thicknesses, stresses, shear } = box;
   const areaM2 = lengthM * task.deck.widthM;
-  const strutsM3 = strutsTotalM3(model);
+  const underM3 = underSlabTotalM3(model);
   const concreteM3 =
-    strutsM3 + weight.boxM3 + weight.blistersM3 + weight.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
+    underM3 + weight.boxM3 + weight.blistersM3 + weight.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
   const { pairs } = travellersOf(model);
   const most = (values: Float64Array): number => values.reduce((a, b) => Math.max(a, b), 0);
   const figures: Record<string, number> = {
@@ -78,7 +79,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
-    ...strutFigures(layout, task.spansM),
+    ...underSlabFigures(layout, task.spansM),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,
@@ -111,7 +112,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     shearDesignKN: shear.mostKN,
     chordShearKN: shear.chordKN,
     concreteM3M2: concreteM3 / areaM2,
-    barsKgM3: (haunchedBars(model, box).totalKg + strutBarsKg(layout.struts, strutsM3, lengthM)) / concreteM3,
+    barsKgM3: (haunchedBars(model, box).totalKg + underSlabBarsKg(layout, underM3, lengthM)) / concreteM3,
     strandKgM2: strandTotalKg(model, box) / areaM2,
   };
   Object.assign(figures, heldFigures(model, box));

@@ -11,7 +11,7 @@ import {
 import { weightAlong, weightOver } from '../concrete-box/boxConcrete.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { diaphragmM3 } from '../concrete-box/boxLoads.ts';
-import { strutsM3M } from '../concrete-box/struts.ts';
+import { underSlabM3M } from '../concrete-box/underSlab.ts';
 import type { Arm } from './arms.ts';
 import { cantileverData } from './cantileverData.ts';
 import { holdsDown, type CantileverModel } from './cantileverModel.ts';
@@ -67,20 +67,19 @@ export function stagedWeight(model: CantileverModel, sections: HaunchedSections)
   const gamma = standard.unitWeights.concreteKNm3;
   const weight = gamma * (1 + share);
   const weights = weightAlong(model, beam.xM).map((kNm3) => kNm3 * (1 + share));
-  const strutsKNm = (depthM: number): number =>
-    gamma * strutsM3M(model.layout.struts, depthM, model.layout.slope);
-  const loadKNm = sections.areaM2.map((area, i) => weights[i]! * area + strutsKNm(model.depthM[i]!));
+  const underKNm = (depthM: number): number => gamma * underSlabM3M(model.layout, depthM);
+  const loadKNm = sections.areaM2.map((area, i) => weights[i]! * area + underKNm(model.depthM[i]!));
   const n = loadKNm.length;
   const atOnce = struckAtOnce(model, loadKNm);
   const longest = arms.length > 0 ? Math.max(...arms.map(({ armM }) => armM)) : 0;
-  const rootKNm = weight * sections.pier.areaM2 + strutsKNm(sections.pier.depthM);
+  const rootKNm = weight * sections.pier.areaM2 + underKNm(sections.pier.depthM);
   const { leastM, mostM, mostKN } = cantileverData.segment;
   const segmentM = Math.min(mostM, Math.max(leastM, mostKN / rootKNm));
   const heaviestKN = rootKNm * segmentM;
   const { overSegment, leastKN, mostKN: heaviestTraveller } = cantileverData.traveller;
   const travellerKN = Math.min(heaviestTraveller, Math.max(leastKN, overSegment * heaviestKN));
 
-  const freeArm = freeArms(model, sections, strutsKNm, travellerKN, segmentM);
+  const freeArm = freeArms(model, sections, underKNm, travellerKN, segmentM);
   const free = arms.map((arm) => freeArm(arm, arm.armM));
   const freeKNm = new Float64Array(n);
   const armOf = Array.from({ length: n - 1 }, (_, e) => armWith(arms, (beam.xM[e]! + beam.xM[e + 1]!) / 2));
@@ -205,7 +204,7 @@ function struckAtOnce(model: CantileverModel, loadKNm: Float64Array): Effects {
 function freeArms(
   model: CantileverModel,
   sections: HaunchedSections,
-  strutsKNm: (depthM: number) => number,
+  underKNm: (depthM: number) => number,
   travellerKN: number,
   segmentM: number,
 ): (arm: Arm, lengthM: number) => CantileverMoments {
@@ -238,7 +237,7 @@ function freeArms(
         weightKNm: (fromPierM) => {
           const way = Math.min(1, fromPierM / arm.armM);
           return (
-            weightKNm3(fromPierM) * areaM2(way) + strutsKNm(model.task.depthM + deeperM * haunchShare(way))
+            weightKNm3(fromPierM) * areaM2(way) + underKNm(model.task.depthM + deeperM * haunchShare(way))
           );
         },
         travellerKN,

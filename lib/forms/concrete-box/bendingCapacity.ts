@@ -1,7 +1,7 @@
 import { barDesignMPa } from '../common/bars.ts';
-import { materials } from '../../actions/index.ts';
+import { materials, type Concrete, type LoadStandard } from '../../actions/index.ts';
+import type { StandardId } from '../../model/index.ts';
 import { boxData } from './boxData.ts';
-import type { BoxModel } from './boxModel.ts';
 
 /** Strands of a section in bending: their area, m2, and depth from the compressed face, m. */
 export interface TensionSteel {
@@ -19,7 +19,11 @@ export interface CompressedFace {
 }
 
 /** What the strength of a section hangs on besides its steel and its face. */
-export type Strengths = Pick<BoxModel, 'concrete' | 'standardId' | 'standard'>;
+export interface Strengths {
+  readonly concrete: Concrete;
+  readonly standardId: StandardId;
+  readonly standard: LoadStandard;
+}
 
 /** Share of the effective depth that the stress block may fill while the steel still yields. */
 const deepestBlock = 0.36;

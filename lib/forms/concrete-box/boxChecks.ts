@@ -10,6 +10,7 @@ import type { BoxTraffic } from './boxTraffic.ts';
 import type { StressUse } from './boxStress.ts';
 import { mostStrandsPerWeb } from './findTendons.ts';
 import type { BendingUse } from './ultimateBending.ts';
+import { underSlabChecks } from './underSlab.ts';
 import type { SizedBox } from './sizeBox.ts';
 
 /** All limit states of a sized box and of its top slab; labels as they are printed. */
@@ -83,7 +84,7 @@ export function boxChecks(model: BoxModel, box: SizedBox): Check[] {
       ),
     );
   }
-  return [...checks, ...model.layout.slab.checks, ...(model.layout.struts?.checks ?? [])];
+  return [...checks, ...model.layout.slab.checks, ...underSlabChecks(model.layout)];
 }
 
 function bending(id: string, label: string, use: BendingUse): Check {

@@ -7,6 +7,7 @@ import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxSection } from './boxSection.ts';
 import type { SizedBox } from './sizeBox.ts';
+import type { Ribs } from './ribs.ts';
 import { strutShape } from './struts.ts';
 
 /** The unit from the side: deck face, bottom slab, edge of the overhang, construction joints and diaphragms faint. */
@@ -27,7 +28,7 @@ export function boxElevation(model: BoxModel, box: SizedBox): Shape[] {
     const at = j === 0 ? endM / 2 : j === last ? lengthM - endM / 2 : x;
     shapes.push(upright('diaphragm', 'concrete', along, at, layout.slab.midM, inner ? pierM : endM));
   });
-  shapes.push(...strutsAlong(layout, along));
+  shapes.push(...underSlabAlong(layout, along));
   for (const x of jointsOf(model)) shapes.push(upright('construction joint', 'concrete', along, x, 0, 0.02));
   return shapes;
 }
@@ -59,25 +60,56 @@ export function boxSections(model: BoxModel, box: SizedBox): SectionCut[] {
     const pier = longest > 0 ? longest : 1;
     cuts.push(cutOf(model.task.deck, 'pier', model.supportsM[pier]!, box.sections.pier));
   }
-  const struts = strutsOf(model.layout, model.task.depthM);
-  return cuts.map((cut) => ({ ...cut, shapes: [...struts, ...cut.shapes] }));
+  const under = underSlabOf(model.layout, model.task.depthM);
+  return cuts.map((cut) => ({ ...cut, shapes: [...under, ...cut.shapes] }));
 }
 
-/** Struts under the wings seen from the side, faint. */
-export function strutsAlong({ struts }: BoxLayout, along: DepthAlong): Shape[] {
+/** Struts under the wings, or ribs, seen from the side, faint. */
+export function underSlabAlong({ struts, ribs, slab }: BoxLayout, along: DepthAlong): Shape[] {
+  const lengthM = along.xM.at(-1)!;
+  if (ribs) {
+    const soffit = constantDepth(lengthM, ribs.rootM);
+    return placesAlong(lengthM, ribs.spacingM).map((x) =>
+      upright('rib', 'concrete', soffit, x, slab.midM, ribs.widthM),
+    );
+  }
   if (!struts) return [];
   const { footAboveSoffitM, headBelowTopM } = boxData.struts;
-  const lengthM = along.xM.at(-1)!;
-  const rows = Math.max(1, Math.floor(lengthM / struts.spacingM));
-  const firstM = (lengthM - (rows - 1) * struts.spacingM) / 2;
   const feet = { xM: along.xM, depthM: along.depthM.map((depth) => depth - footAboveSoffitM) };
-  return Array.from({ length: rows }, (_, k) =>
-    upright('strut', 'concrete', feet, firstM + k * struts.spacingM, headBelowTopM, struts.sideM),
+  return placesAlong(lengthM, struts.spacingM).map((x) =>
+    upright('strut', 'concrete', feet, x, headBelowTopM, struts.sideM),
   );
 }
 
+/** Places at a spacing along a deck, as many before as behind its middle, m. */
+function placesAlong(lengthM: number, spacingM: number): number[] {
+  const count = Math.max(1, Math.floor(lengthM / spacingM));
+  const firstM = (lengthM - (count - 1) * spacingM) / 2;
+  return Array.from({ length: count }, (_, k) => firstM + k * spacingM);
+}
+
+/** Struts or ribs of a section of a depth, m. */
+export function underSlabOf(layout: BoxLayout, depthM: number): Shape[] {
+  return layout.ribs ? ribsOf(layout, layout.ribs) : strutsOf(layout, depthM);
+}
+
+/** One rib behind the section: from edge to edge under the slab, deepest at the webs and between them. */
+function ribsOf({ slab, cells, spacingM, overhangM }: BoxLayout, { rootM, edgeM }: Ribs): Shape[] {
+  const webM = (cells * spacingM) / 2;
+  const tipM = webM + overhangM;
+  const points: [number, number][] = [
+    [-tipM, -slab.midM],
+    [-tipM, -edgeM],
+    [-webM, -rootM],
+    [webM, -rootM],
+    [tipM, -edgeM],
+    [tipM, -slab.midM],
+  ];
+  return [{ part: 'rib', material: 'concrete', kind: 'polygon', points, faint: true }];
+}
+
 /** Struts under the wings of a section of a depth, m: from the foot of the outer webs to the heads, as lines. */
-export function strutsOf({ struts, cells, spacingM, slope }: BoxLayout, depthM: number): Shape[] {
+function strutsOf({ struts, cells, spacingM, slope }: BoxLayout, depthM: number): Shape[] {
   if (!struts) return [];
   const { headBelowTopM } = boxData.struts;
   const headM = (cells * spacingM) / 2 + struts.outM;

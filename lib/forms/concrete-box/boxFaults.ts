@@ -20,6 +20,7 @@ export function boxFaults(task: Asked): Problem[] {
     ...within(['strengthMPa'], task.strengthMPa, leastMPa, mostMPa, 'MPa'),
     ...within(['light', 'densityKgM3'], light?.densityKgM3, leastKgM3, mostKgM3, 'kg/m3 oven-dry'),
     ...(light && method === 'launch' ? [launchedLight] : []),
+    ...(task.ribs && (task.struts || task.transverse) ? [ribsBeside] : []),
     ...bySpan(['light', 'middleM'], light?.middleM, spansM, 'm'),
     ...bySpan(
       ['ballastKNm'],
@@ -42,6 +43,14 @@ const launchedLight: Problem = {
   expected: 'a deck that is cast in its place',
   received: 'one that is launched',
   remedy: 'Leave the lightweight concrete out: it is not followed over the launching piers',
+};
+
+const ribsBeside: Problem = {
+  code: 'refused',
+  path: ['ribs'],
+  expected: 'a slab that is carried in one way',
+  received: 'ribs beside struts or tendons across',
+  remedy: 'Leave the ribs out, or struts and tendons across',
 };
 
 /** A value outside its range as a problem; none where it is absent or inside. */

@@ -4,6 +4,7 @@ import { designSlab, type SlabDesign } from '../common/slab/designSlab.ts';
 import type { SlabCase } from '../common/slab/slabCase.ts';
 import { acrossSlab } from './acrossSlab.ts';
 import { boxData } from './boxData.ts';
+import { designRibs, type RibCase, type Ribs } from './ribs.ts';
 import { cellsWithin, mostSpacingM, strutPlan, type StrutPlan } from './strutPlan.ts';
 import { designStruts, type Struts } from './struts.ts';
 
@@ -22,16 +23,23 @@ export interface BoxLayout {
   readonly across?: { readonly strandKgM2: number; readonly forceKNm: number };
   /** Struts under the wings; absent where they only overhang. */
   readonly struts?: Struts;
+  /** Ribs across the deck under the slab; absent where it spans from web to web. */
+  readonly ribs?: Ribs;
 }
 
 /** Cells of a box under a top slab with or without tendons across the deck. */
 export function cellsFor(widthM: number, hasTendonsAcross: boolean): number {
+  return cellsUnder(widthM, mostSpacingM(hasTendonsAcross));
+}
+
+/** Cells of a box under a deck of a width, webs at most `mostM` apart, m. */
+export function cellsUnder(widthM: number, mostM: number): number {
   const { overhangOverSpacing } = boxData.layout;
-  return Math.max(1, Math.ceil(widthM / mostSpacingM(hasTendonsAcross) - 2 * overhangOverSpacing - 1e-9));
+  return Math.max(1, Math.ceil(widthM / mostM - 2 * overhangOverSpacing - 1e-9));
 }
 
 /**
- * As few cells as keep the webs within the practical spacing of a slab, plain or with tendons across the deck, overhangs in
+ * As few cells as keep the webs within the practical spacing of a slab, plain, with tendons across the deck or on ribs, overhangs in
  * a fixed proportion to it or as the width asked of the box leaves them, outer webs leaning inwards, and the top slab designed across the webs and, where the wings have
  * them, their struts.
  * @param deepestM greatest depth of the box, m; `depthM` of the task is the least
@@ -41,7 +49,7 @@ export function boxLayout(task: UnitTask, deepestM = task.depthM): BoxLayout {
   const across = task.transverse === true;
   const plan = task.struts
     ? strutPlan(deck.widthM, depthM, across, boxWidthM)
-    : plainPlan(deck.widthM, across, boxWidthM);
+    : plainPlan(deck.widthM, task.ribs ? boxData.ribs.mostWebSpacingM : mostSpacingM(across), boxWidthM);
   const { cells, spacingM, overhangM } = plan;
   const slabCase: SlabCase = {
     standard,
@@ -54,6 +62,7 @@ export function boxLayout(task: UnitTask, deepestM = task.depthM): BoxLayout {
   };
   const slope = webSlope(cells * spacingM, depthM);
   const base = { cells, webs: cells + 1, spacingM, overhangM, slope };
+  if (task.ribs) return { ...base, ...ribbed({ standard, deck, plan, depthM }) };
   if (!task.struts) return { ...base, ...topSlab(slabCase, across) };
   // The weight of the slab presses on the struts, and their pull thickens the slab a little: twice is enough.
   const first = topSlab(slabCase, across);
@@ -65,15 +74,32 @@ export function boxLayout(task: UnitTask, deepestM = task.depthM): BoxLayout {
   return { ...base, ...tied, struts: designStruts({ ...strutCase, slab: tied.slab }) };
 }
 
-function plainPlan(widthM: number, hasTendonsAcross: boolean, boxWidthM: number | undefined): StrutPlan {
-  if (boxWidthM !== undefined) {
-    const within = cellsWithin(boxWidthM, hasTendonsAcross);
-    return { ...within, outM: 0, overhangM: (widthM - boxWidthM) / 2 };
-  }
+function plainPlan(widthM: number, mostM: number, boxWidthM: number | undefined): StrutPlan {
+  if (boxWidthM !== undefined)
+    return { ...cellsWithin(boxWidthM, mostM), outM: 0, overhangM: (widthM - boxWidthM) / 2 };
   const { overhangOverSpacing } = boxData.layout;
-  const cells = cellsFor(widthM, hasTendonsAcross);
+  const cells = cellsUnder(widthM, mostM);
   const spacingM = widthM / (cells + 2 * overhangOverSpacing);
   return { cells, spacingM, outM: 0, overhangM: overhangOverSpacing * spacingM };
+}
+
+/** A slab that spans along the deck from rib to rib, its bars named as those of a slab across it, and the ribs. */
+function ribbed(ribCase: Omit<RibCase, 'slab'>): Pick<BoxLayout, 'slab' | 'ribs'> {
+  const { standard, deck } = ribCase;
+  const slab = designSlab({
+    standard,
+    deck,
+    direction: 'along',
+    spacingM: boxData.ribs.spacingM,
+    overhangM: 0,
+    continuous: true,
+    uniform: true,
+  });
+  const { mainBarsKgM2, crossBarsKgM2 } = slab;
+  return {
+    slab: { ...slab, mainBarsKgM2: crossBarsKgM2, crossBarsKgM2: mainBarsKgM2 },
+    ribs: designRibs({ ...ribCase, slab }),
+  };
 }
 
 function topSlab(slabCase: SlabCase, isAcross: boolean): Pick<BoxLayout, 'slab' | 'across'> {

@@ -8,7 +8,7 @@ import type { BoxModel } from './boxModel.ts';
 import type { Outline } from './boxOutline.ts';
 import { heightUnder } from './heightUnder.ts';
 import type { SizedBox } from './sizeBox.ts';
-import { strutsM3M } from './struts.ts';
+import { underSlabLines, underSlabM3M } from './underSlab.ts';
 
 /** Measured lines of the superstructure: concrete, bars, strand, formwork and, where cast in place, falsework. */
 export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
@@ -50,10 +50,7 @@ export function boxLines(model: BoxModel, box: SizedBox): MeasuredLine[] {
       `${layout.webs} webs, ${group.tendonsPerWeb} tendons of ${group.strandsPerTendon.toFixed(1)} strands each${tendons.meanShare < 1 ? `, ${(100 * tendons.meanShare).toFixed(0)} % of them along the mean of the deck` : ''}`,
     ),
   ];
-  lines.push(
-    ...acrossLines(model),
-    ...strutLines(model, strutsM3M(layout.struts, task.depthM, layout.slope) * lengthM),
-  );
+  lines.push(...acrossLines(model), ...underSlabLines(model, underSlabM3M(layout, task.depthM) * lengthM));
   if (tendons.straightStrands > 0)
     lines.push(
       measured(
@@ -92,38 +89,6 @@ export function acrossLines({
       across.strandKgM2 * lengthM * task.deck.widthM,
       'tendons across the top slab',
       `${across.forceKNm.toFixed(0)} kN per m of deck after losses, ${across.strandKgM2.toFixed(1)} kg/m2`,
-    ),
-  ];
-}
-
-/** Struts under the wings, `concreteM3` of them, and bars of the slab thickened along their heads, where it has them. */
-export function strutLines(
-  { layout: { struts }, lengthM }: Pick<BoxModel, 'layout' | 'lengthM'>,
-  concreteM3: number,
-): MeasuredLine[] {
-  if (!struts) return [];
-  const { spacingM, sideM, barsKgM3, beamBarsKgM, beamM } = struts;
-  return [
-    measured(
-      'deck',
-      'wing-strut',
-      concreteM3,
-      'struts under the wings',
-      `2 rows every ${spacingM} m, ${mm(sideM)} mm square`,
-    ),
-    measured(
-      'deck',
-      'reinforcement',
-      barsKgM3 * concreteM3,
-      'bars of the struts',
-      '1 % of their section, laps included',
-    ),
-    measured(
-      'deck',
-      'reinforcement',
-      beamBarsKgM * lengthM,
-      'bars along the heads of the struts',
-      `2 thickenings of the slab to ${mm(beamM)} mm, bending from strut to strut and shear`,
     ),
   ];
 }

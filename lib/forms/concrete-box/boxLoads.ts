@@ -4,12 +4,12 @@ import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxSection } from './boxSection.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
-import { strutsM3M } from './struts.ts';
+import { underSlabM3M } from './underSlab.ts';
 
 /** Own weight of the box. */
 export interface OwnWeight {
   readonly effects: Effects;
-  /** Weight along the spans at the stations, blisters and struts included, kN/m. */
+  /** Weight along the spans at the stations, blisters and struts or ribs included, kN/m. */
   readonly loadKNm: Float64Array;
   /** Concrete along the spans without blisters and diaphragms, m3. */
   readonly boxM3: number;
@@ -24,8 +24,8 @@ export function ownWeight(model: BoxModel, sections: SectionsAlong): OwnWeight {
   const { share } = boxData.blisters;
   const gamma = weightAlong(model, beam.xM);
   const { layout, task } = model;
-  const struts = strutsM3M(layout.struts, task.depthM, layout.slope);
-  const loadKNm = sections.areaM2.map((area, i) => gamma[i]! * ((1 + share) * area + struts));
+  const under = underSlabM3M(layout, task.depthM);
+  const loadKNm = sections.areaM2.map((area, i) => gamma[i]! * ((1 + share) * area + under));
   let boxM3 = 0;
   for (let e = 0; e < loadKNm.length - 1; e++)
     boxM3 += ((sections.areaM2[e]! + sections.areaM2[e + 1]!) / 2) * (beam.xM[e + 1]! - beam.xM[e]!);

@@ -6,7 +6,8 @@ import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
 import { betweenZeros, workingWidthM } from './shearLag.ts';
 import type { SizedBox } from './sizeBox.ts';
-import { strutsM3M, type Struts } from './struts.ts';
+import type { Struts } from './struts.ts';
+import { underSlabBarsKg, underSlabM3M } from './underSlab.ts';
 
 /**
  * Characteristic reactions of the whole deck: own weight with diaphragms, superimposed load, traffic. The parasitic part
@@ -49,9 +50,9 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
   const { layout, beam, task, traffic, lengthM } = model;
   const { sections, tendons, own, thicknesses } = box;
   const areaM2 = lengthM * task.deck.widthM;
-  const strutsM3 = strutsM3M(layout.struts, task.depthM, layout.slope) * lengthM;
-  const concreteM3 = strutsM3 + own.boxM3 + own.blistersM3 + own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
-  const barsKg = boxBars(model, box).totalKg + strutBarsKg(layout.struts, strutsM3, lengthM);
+  const underM3 = underSlabM3M(layout, task.depthM) * lengthM;
+  const concreteM3 = underM3 + own.boxM3 + own.blistersM3 + own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
+  const barsKg = boxBars(model, box).totalKg + underSlabBarsKg(layout, underM3, lengthM);
   const strands = tendons.strandsPerWeb * layout.webs + tendons.straightStrands;
   const figures: Record<string, number> = {
     cells: layout.cells,
@@ -63,7 +64,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
-    ...strutFigures(layout, task.spansM),
+    ...underSlabFigures(layout, task.spansM),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,
@@ -113,19 +114,37 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
   return figures;
 }
 
-/** Bars of struts and along their heads, kg. */
-export function strutBarsKg(struts: Struts | undefined, strutsM3: number, lengthM: number): number {
-  return struts ? struts.barsKgM3 * strutsM3 + struts.beamBarsKgM * lengthM : 0;
-}
-
-/** Named figures of the struts of a box and of the wings on them; none without struts. */
-export function strutFigures(layout: BoxLayout, spansM: readonly number[]): Record<string, number> {
-  if (!layout.struts) return {};
-  const { outM, sideM, lengthM, riseM, forceKN, tie, hangKNm, beamM } = layout.struts;
+/** Named figures of struts or ribs and of the wings on them; none without. */
+export function underSlabFigures(layout: BoxLayout, spansM: readonly number[]): Record<string, number> {
+  const { struts, ribs } = layout;
+  if (!struts && !ribs) return {};
   const { inSpanM, overPierM } = betweenZeros(spansM);
   return {
     workingWidthM: workingWidthM(layout, inSpanM),
     workingWidthAtPiersM: workingWidthM(layout, overPierM),
+    ...(struts ? strutFigures(struts) : {}),
+    ...(ribs
+      ? {
+          ribDepthM: ribs.rootM,
+          ribRootKNm: ribs.rootMomentKNm,
+          ribInsideKNm: ribs.insideMomentKNm,
+          ribShearKN: ribs.shearKN,
+        }
+      : {}),
+  };
+}
+
+function strutFigures({
+  outM,
+  sideM,
+  lengthM,
+  riseM,
+  forceKN,
+  tie,
+  hangKNm,
+  beamM,
+}: Struts): Record<string, number> {
+  return {
     strutsOutM: outM,
     strutRiseM: riseM,
     strutLengthM: lengthM,

@@ -168,9 +168,10 @@ export function curveTorque(
   return torque;
 }
 
-/** Bending of a web across the deck: half of the root moment of the slab, shared by the stiffness of web and slab. */
-export function webBending({ slab, spacingM }: BoxLayout, depthM: number, webM: number): number {
+/** Bending of a web across the deck: half of the root moment of the slab or its ribs, shared by the stiffness of web and slab. */
+export function webBending({ slab, ribs, spacingM }: BoxLayout, depthM: number, webM: number): number {
   const web = (4 * webM ** 3) / Math.max(0.3, depthM);
-  const deck = (2 * slab.midM ** 3) / spacingM;
-  return (0.5 * slab.rootMomentKNm * web) / (web + deck);
+  const deck = (2 * (ribs ? ribs.stiffM3 : slab.midM ** 3)) / spacingM;
+  const rootKNm = ribs ? ribs.rootMomentKNm / ribs.spacingM : slab.rootMomentKNm;
+  return (0.5 * rootKNm * web) / (web + deck);
 }

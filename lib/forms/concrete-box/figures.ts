@@ -4,6 +4,7 @@ import { formManual, linesOf, spansOf } from '../common/formManual.ts';
 import { slabCheckFigures } from '../common/slab/slabFigures.ts';
 import { boxCheckFigures } from './checkFigures.ts';
 import { concreteFigures } from './concreteFigures.ts';
+import { ribFigures } from './ribFigures.ts';
 import { strutFigures } from './strutFigures.ts';
 import { tendonFigures } from './tendonFigures.ts';
 
@@ -11,7 +12,7 @@ const manual = formManual('concrete-box');
 const { figure, sized, line } = manual;
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
-const concrete = ['box', 'blisters and joints', 'diaphragms'] as const;
+const concrete = ['box', 'blisters and joints', 'diaphragms', 'ribs under the slab'] as const;
 const bars = [
   'top slab across',
   'top slab along',
@@ -22,6 +23,7 @@ const bars = [
   'blisters and anchorages',
   'bars of the struts',
   'bars along the heads of the struts',
+  'bars of the ribs',
 ];
 const strands = ['draped tendons', 'centred tendons for launching'];
 const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/widthM` }) as const;
@@ -46,11 +48,12 @@ export const boxFigures: readonly Descriptor[] = [
     'cells',
     'cells of the box',
     'no',
-    'as few as keep the webs within their practical spacing, which is wider where tendons run across the slab; struts carry the wings in their stead where it has them',
+    'as few as keep the webs within their practical spacing, which is wider where tendons run across the slab or ribs carry it; struts carry the wings in their stead where it has them',
     './task/deck/widthM',
     './task/boxWidthM?',
     'data/concrete-box/layout/mostWebSpacingM',
     'data/concrete-box/across/mostWebSpacingM',
+    'data/concrete-box/ribs/mostWebSpacingM',
     'data/concrete-box/layout/overhangOverSpacing',
   ),
   figure('webs', {
@@ -222,7 +225,7 @@ export const boxFigures: readonly Descriptor[] = [
     label: 'concrete per m2 of deck',
     unit: 'm3/m2',
     method: 'ratio',
-    formula: '(box + blisters and joints + diaphragms + struts) / (length x deck width)',
+    formula: '(box + blisters and joints + diaphragms + struts or ribs) / (length x deck width)',
     inputs: (at) => ({ lines: concreteLines(at), ...area(at) }),
     compute: ({ lines, spans, width }) => sum(lines) / (sum(spans) * width),
   }),
@@ -261,4 +264,5 @@ export const boxFigures: readonly Descriptor[] = [
   ...acrossFigures(manual),
   ...concreteFigures(manual),
   ...strutFigures(manual),
+  ...ribFigures(manual),
 ];

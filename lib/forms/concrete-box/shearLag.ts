@@ -36,19 +36,24 @@ export function effectiveWingM(wingM: number, zerosM: number): number {
   return Math.min(wingM, 0.2 * wingM + 0.1 * zerosM, 0.2 * zerosM);
 }
 
-/** Width of the deck that works in bending, m; all of it without wings on struts. */
+/** Whether the wings reach far beyond the webs because something carries them. */
+function isWide({ struts, ribs }: BoxLayout): boolean {
+  return struts !== undefined || ribs !== undefined;
+}
+
+/** Width of the deck that works in bending, m; all of it where the wings are plain. */
 export function workingWidthM(layout: BoxLayout, zerosM: number): number {
   const { cells, spacingM, overhangM, struts } = layout;
   const wingM = overhangM + (struts?.outM ?? 0);
-  return cells * spacingM + 2 * (struts ? effectiveWingM(wingM, zerosM) : wingM);
+  return cells * spacingM + 2 * (isWide(layout) ? effectiveWingM(wingM, zerosM) : wingM);
 }
 
 /**
- * Shear lag of wings on struts, which reach far beyond their webs: bending finds the section without what does not work of
+ * Shear lag of wings on struts or ribs, which reach far beyond their webs: bending finds the section without what does not work of
  * them, tendons press on all of it. Plain wings are short and count in full.
  */
 export function lagOf(layout: BoxLayout, section: BoxSection, zerosM: number): Lag {
-  if (!layout.struts) return { top: 1, low: 1 };
+  if (!isWide(layout)) return { top: 1, low: 1 };
   const halfM = workingWidthM(layout, zerosM) / 2;
   const { outer, cells: voids } = section.outline;
   const working = polygonProperties(within(outer, halfM), voids);

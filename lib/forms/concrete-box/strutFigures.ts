@@ -17,33 +17,6 @@ export function strutFigures({ sized, check }: ReturnType<typeof formManual>): D
       'data/concrete-box/struts/leastRiseOverRun',
       'data/concrete-box/webSlope/most',
     ),
-    ...(
-      [
-        [
-          'workingWidthM',
-          'width of the deck that works in bending in the spans',
-          '0.85 of an end span or 0.7 of an inner one',
-        ],
-        [
-          'workingWidthAtPiersM',
-          'width of the deck that works in bending over the piers',
-          '0.15 of both spans',
-        ],
-      ] as const
-    ).map(([name, label, zeros]) =>
-      sized(
-        name,
-        label,
-        'm',
-        `box + 2 x (0.2 wing + 0.1 l0, at most 0.2 l0 and the wing), l0 = ${zeros} (EN 1992-1-1 5.3.2.1, from memory)`,
-        './task/deck/widthM',
-        'webSpacingM',
-        'cells',
-        'strutsOutM',
-        'overhangM',
-        'spans',
-      ),
-    ),
     sized(
       'strutRiseM',
       'height of a strut',

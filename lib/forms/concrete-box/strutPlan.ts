@@ -22,12 +22,9 @@ export function mostSpacingM(hasTendonsAcross: boolean): number {
   return hasTendonsAcross ? boxData.across.mostWebSpacingM : boxData.layout.mostWebSpacingM;
 }
 
-/** Fewest cells of a box whose width between its outer webs is given, m. */
-export function cellsWithin(
-  boxWidthM: number,
-  hasTendonsAcross: boolean,
-): Pick<StrutPlan, 'cells' | 'spacingM'> {
-  const cells = Math.max(1, Math.ceil(boxWidthM / mostSpacingM(hasTendonsAcross) - 1e-9));
+/** Fewest cells of a box whose width between its outer webs is given, webs at most `mostM` apart, m. */
+export function cellsWithin(boxWidthM: number, mostM: number): Pick<StrutPlan, 'cells' | 'spacingM'> {
+  const cells = Math.max(1, Math.ceil(boxWidthM / mostM - 1e-9));
   return { cells, spacingM: boxWidthM / cells };
 }
 
@@ -50,7 +47,7 @@ export function strutPlan(
   if (boxWidthM !== undefined) {
     const wingM = (widthM - boxWidthM) / 2;
     const outM = Math.min(wingM / (1 + share), reachM);
-    return { ...cellsWithin(boxWidthM, hasTendonsAcross), outM, overhangM: wingM - outM };
+    return { ...cellsWithin(boxWidthM, mostM), outM, overhangM: wingM - outM };
   }
   for (let cells = 1; ; cells++) {
     const evenM = widthM / (cells + 2 + 2 * share);

@@ -46,8 +46,21 @@ export function strutReaction(
   thicknessM: number,
   strutSpacingM: number,
 ): StrutReaction {
+  return lineReaction(id, deck, strutLine(deck.widthM, plan), thicknessM, strutSpacingM);
+}
+
+/**
+ * What a member takes of loads across the deck by its influence line, under a slab of `thicknessM`; members stand `apartM`
+ * along the deck. Of a line of moments the loads come out in kNm.
+ */
+export function lineReaction(
+  id: StandardId,
+  deck: DeckSpec,
+  line: CrossLine,
+  thicknessM: number,
+  apartM: number,
+): StrutReaction {
   const standard = loadStandard(id);
-  const line = strutLine(deck.widthM, plan);
   const { surfacingKNm2, edgesKNm } = superimposedOn(deck);
   const areaM = integral(line);
   const mirrored: CrossLine = {
@@ -56,7 +69,7 @@ export function strutReaction(
   };
   const weightOf = (axles: readonly { readonly loadKN: number }[]): number =>
     axles.reduce((sum, { loadKN }) => sum + loadKN, 0);
-  const perM = Math.max(...standard.vehicles.map(({ axles }) => weightOf(axles))) / strutSpacingM;
+  const perM = Math.max(...standard.vehicles.map(({ axles }) => weightOf(axles))) / apartM;
   const sides = deck.carriagewayOffsetM === 0 ? [line] : [line, mirrored];
   const traffic = sides
     .map((side) => trafficOnCrossLine(id, deck, side, perM))
@@ -87,7 +100,7 @@ const steps = 20;
 
 /** Most that the axles of one vehicle make of an influence along the line, given from -`reachM` to `reachM`. */
 export function worstAxles(
-  { axleSets }: StrutReaction,
+  { axleSets }: Pick<StrutReaction, 'axleSets'>,
   reachM: number,
   influence: (xM: number) => number,
 ): number {
