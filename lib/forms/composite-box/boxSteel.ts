@@ -126,6 +126,16 @@ function diaphragms({ shape, supportsM }: BoxGirderModel): number {
   return (1 + ribShare) * materials.steelDensityKgM3 * volume;
 }
 
+/**
+ * Share of a stretch over which a value that runs straight from `a` to `b` is negative. Whole elements would come and go with
+ * the rounding of moments that are nothing, over the abutments above all.
+ */
+function negativeShare(a: number, b: number): number {
+  if (a >= 0 && b >= 0) return 0;
+  if (a <= 0 && b <= 0) return 1;
+  return Math.min(a, b) / (Math.min(a, b) - Math.max(a, b));
+}
+
 /** Length over which the bottom plate can be pressed under design loads, m. */
 function pressedLength(model: GirderModel, { steelStage, superimposed, traffic }: GirderEffects): number {
   const { uls } = model.standard.factors;
@@ -135,7 +145,7 @@ function pressedLength(model: GirderModel, { steelStage, superimposed, traffic }
       uls.permanentFavourable * steelStage.momentKNm[i]! +
       superimposed.momentKNm[i]! +
       uls.traffic * traffic.momentMinKNm[i]!;
-    if (least(e) < 0 || least(e + 1) < 0) lengthM += length;
+    lengthM += length * negativeShare(least(e), least(e + 1));
   });
   // Single spans have none to speak of: traffic does not lift them.
   return model.task.spansM.length > 1 ? lengthM : 0;
