@@ -1,4 +1,4 @@
-/** Lightweight concrete of a box: diaphragms and blisters stay of ordinary concrete. */
+/** Lightweight concrete of a box: its diaphragms, struts and ribs stay of ordinary concrete. */
 export interface LightConcreteAsked {
   /** Oven-dry density, kg/m3. */
   readonly densityKgM3: number;

@@ -1,5 +1,12 @@
 import { formModule } from '../../forms/index.ts';
-import { formIds, standardIds, type DeckStrip, type FormId, type StandardId } from '../../model/index.ts';
+import {
+  formIds,
+  standardIds,
+  type DeckStrip,
+  type FormId,
+  type StandardId,
+  type UnitTask,
+} from '../../model/index.ts';
 import { deckSpec } from '../../site/index.ts';
 import { perM2, splitQuantities } from '../../takeoff/index.ts';
 import type { CaseInputs, EvidenceCase } from '../caseInputs.ts';
@@ -7,7 +14,8 @@ import type { CaseInputs, EvidenceCase } from '../caseInputs.ts';
 /**
  * A form sized by the pipeline's own module: quantities per m2 of deck, the figures of its design, and own weight share.
  * Inputs: form, spansM, widthM, carriagewayM, lanes, depthM; optional standard, girders, pierDepthM (parabolic haunch),
- * substringers (1 or 0), pylons, surfacingM, radiusM, deckPlateM.
+ * substringers (1 or 0), pylons, surfacingM, radiusM, deckPlateM; of concrete boxes boxWidthM, strengthMPa, lightKgM3 with
+ * lightMiddleM, ballastKNm.
  */
 export const sizedForm: EvidenceCase = (inputs) => {
   const form = oneOf<FormId>(inputs.text('form'), formIds);
@@ -30,15 +38,31 @@ export const sizedForm: EvidenceCase = (inputs) => {
     ...(inputs.has('substringers') ? { substringers: inputs.number('substringers') === 1 } : {}),
     ...(inputs.has('deckPlateM') ? { deckPlateM: inputs.number('deckPlateM') } : {}),
     ...(inputs.has('pylons') ? { pylons: inputs.numbers('pylons') } : {}),
+    ...boxChoices(inputs),
   });
   const deckAreaM2 = spansM.reduce((sum, span) => sum + span, 0) * deck.widthM;
   const { superstructure } = splitQuantities(design.lines);
   return {
     ...design.figures,
+    supportDepthM: design.depthM.support,
     ...perM2(superstructure, deckAreaM2),
     ownWeightShare: design.ownWeightShare,
   };
 };
+
+/** What may be asked of a concrete box. */
+function boxChoices(
+  inputs: CaseInputs,
+): Pick<UnitTask, 'boxWidthM' | 'strengthMPa' | 'light' | 'ballastKNm'> {
+  return {
+    ...(inputs.has('boxWidthM') ? { boxWidthM: inputs.number('boxWidthM') } : {}),
+    ...(inputs.has('strengthMPa') ? { strengthMPa: inputs.number('strengthMPa') } : {}),
+    ...(inputs.has('lightKgM3')
+      ? { light: { densityKgM3: inputs.number('lightKgM3'), middleM: inputs.numbers('lightMiddleM') } }
+      : {}),
+    ...(inputs.has('ballastKNm') ? { ballastKNm: inputs.numbers('ballastKNm') } : {}),
+  };
+}
 
 /** Lanes across the carriageway, a barrier strip on either side. */
 function strips(inputs: CaseInputs): DeckStrip[] {

@@ -23,9 +23,9 @@ export function ownWeight(model: BoxModel, sections: SectionsAlong): OwnWeight {
   const { beam } = model;
   const { share } = boxData.blisters;
   const gamma = weightAlong(model, beam.xM);
-  const { layout, task } = model;
-  const under = underSlabM3M(layout, task.depthM);
-  const loadKNm = sections.areaM2.map((area, i) => gamma[i]! * ((1 + share) * area + under));
+  const { layout, task, standard } = model;
+  const underKNm = standard.unitWeights.concreteKNm3 * underSlabM3M(layout, task.depthM);
+  const loadKNm = sections.areaM2.map((area, i) => gamma[i]! * (1 + share) * area + underKNm);
   let boxM3 = 0;
   for (let e = 0; e < loadKNm.length - 1; e++)
     boxM3 += ((sections.areaM2[e]! + sections.areaM2[e + 1]!) / 2) * (beam.xM[e + 1]! - beam.xM[e]!);
