@@ -83,7 +83,10 @@ function plainPlan(widthM: number, mostM: number, boxWidthM: number | undefined)
   return { cells, spacingM, outM: 0, overhangM: overhangOverSpacing * spacingM };
 }
 
-/** A slab that spans along the deck from rib to rib, its bars named as those of a slab across it, and the ribs. */
+/**
+ * A slab that spans along the deck from rib to rib, its bars named as those of a slab across it, and the ribs. What bends it
+ * from rib to rib is not added to what it carries along the deck.
+ */
 function ribbed(ribCase: Omit<RibCase, 'slab'>): Pick<BoxLayout, 'slab' | 'ribs'> {
   const { standard, deck } = ribCase;
   const slab = designSlab({

@@ -35,11 +35,8 @@ export function sectionsAlong(model: BoxModel, t: Thicknesses): SectionsAlong {
   const pier = boxSection(layout, task.depthM, t.supportWebM, t.pierBottomM);
   const end = boxSection(layout, task.depthM, t.supportWebM, t.bottomM);
   const zeros = betweenZeros(task.spansM);
-  const lags = {
-    span: lagOf(layout, span, zeros.inSpanM),
-    pier: lagOf(layout, pier, zeros.overPierM),
-    end: lagOf(layout, end, zeros.inSpanM),
-  };
+  // What a web is thicker over an abutment hardly moves it.
+  const lags = { span: lagOf(layout, span, zeros.inSpanM), pier: lagOf(layout, pier, zeros.overPierM) };
   const n = pierShare.length;
   const between = (a: number, atPier: number, atEnd: number, i: number): number =>
     a + pierShare[i]! * (atPier - a) + (supportShare[i]! - pierShare[i]!) * (atEnd - a);
@@ -48,7 +45,7 @@ export function sectionsAlong(model: BoxModel, t: Thicknesses): SectionsAlong {
     return Float64Array.from({ length: n }, (_, i) => between(...values, i));
   };
   const lagAlong = (pick: (lag: Lag) => number): Float64Array => {
-    const values = [pick(lags.span), pick(lags.pier), pick(lags.end)] as const;
+    const values = [pick(lags.span), pick(lags.pier), pick(lags.span)] as const;
     return Float64Array.from({ length: n }, (_, i) => between(...values, i));
   };
   return {

@@ -53,31 +53,37 @@ export function workingWidthM(layout: BoxLayout, zerosM: number): number {
  * them, tendons press on all of it. Plain wings are short and count in full.
  */
 export function lagOf(layout: BoxLayout, section: BoxSection, zerosM: number): Lag {
-  if (!isWide(layout)) return { top: 1, low: 1 };
   const halfM = workingWidthM(layout, zerosM) / 2;
-  const { outer, cells: voids } = section.outline;
-  const working = polygonProperties(within(outer, halfM), voids);
-  const topM = -working.centroidM;
+  const { outer } = section.outline;
+  // The outline begins at an edge of the deck.
+  if (!isWide(layout) || halfM > -outer[0]![0] - 1e-9) return { top: 1, low: 1 };
+  const idle = polygonProperties(beyond(outer, halfM));
+  const { areaM2, topM, inertiaM4 } = section;
+  // Both edges, about the top of the slab.
+  const leftM2 = areaM2 - 2 * idle.areaM2;
+  const axisM = (areaM2 * topM + 2 * idle.areaM2 * idle.centroidM) / leftM2;
+  const leftM4 =
+    inertiaM4 +
+    areaM2 * topM ** 2 -
+    2 * (idle.inertiaM4 + idle.areaM2 * idle.centroidM ** 2) -
+    leftM2 * axisM ** 2;
   return {
-    top: topM / working.inertiaM4 / (section.topM / section.inertiaM4),
-    low: (section.depthM - topM) / working.inertiaM4 / (section.lowM / section.inertiaM4),
+    top: axisM / leftM4 / (topM / inertiaM4),
+    low: (section.depthM - axisM) / leftM4 / (section.lowM / inertiaM4),
   };
 }
 
 type Point = readonly [y: number, z: number];
 
-/** The part of an outline no further than `halfM` from the middle (Sutherland and Hodgman clipping). */
-function within(outline: readonly Point[], halfM: number): Point[] {
-  return clipped(clipped(outline, 1, halfM), -1, halfM);
-}
-
-function clipped(outline: readonly Point[], side: 1 | -1, halfM: number): Point[] {
-  return outline.flatMap((to, i): Point[] => {
-    const from = outline.at(i - 1)!;
-    const [before, here] = [halfM - side * from[0], halfM - side * to[0]];
-    const crossing: Point[] = [];
-    if (before * here < 0)
-      crossing.push([side * halfM, from[1] + (before / (before - here)) * (to[1] - from[1])]);
-    return here >= 0 ? [...crossing, to] : crossing;
-  });
+/** The part of an outline further than `fromM` from the middle on one side (Sutherland and Hodgman clipping). */
+function beyond(outline: readonly Point[], fromM: number): Point[] {
+  const part: Point[] = [];
+  let from = outline.at(-1)!;
+  for (const to of outline) {
+    const [before, here] = [from[0] - fromM, to[0] - fromM];
+    if (before * here < 0) part.push([fromM, from[1] + (before / (before - here)) * (to[1] - from[1])]);
+    if (here >= 0) part.push(to);
+    from = to;
+  }
+  return part;
 }
