@@ -17,6 +17,8 @@ afterAll(() => site.close());
 async function standing(of: Page): Promise<void> {
   await of.waitForSelector('[id="1+020"] [data-handle="pier/1"]', { state: 'attached', timeout: 60_000 });
 }
+/** Waits until the brief stands: what a study says is there before anything is worked out. */
+const briefed = (of: Page): Promise<unknown> => field(of, 'no-pier width').waitFor({ timeout: 60_000 });
 const field = (of: Page, name: string) => of.locator(`[role=spinbutton][aria-label^="${name},"]`).first();
 const shown = async (of: Page, name: string): Promise<string | null> => field(of, name).textContent();
 async function type(of: Page, name: string, value: string): Promise<void> {
@@ -43,12 +45,12 @@ describe('a study on the device', () => {
   it('is not lost when the page is loaded again at once after a change, before it has been saved', async () => {
     await type(page, 'no-pier width', '64');
     await page.reload();
-    await standing(page);
+    await briefed(page);
     expect(await shown(page, 'no-pier width')).toBe('64.0');
     // Saved on leaving or after: the journal is empty, and the study on the device has it.
     await allSaved(page);
     await page.reload();
-    await standing(page);
+    await briefed(page);
     expect(await shown(page, 'no-pier width')).toBe('64.0');
   });
 
@@ -82,7 +84,7 @@ describe('a study on the device', () => {
     const second = await page.context().newPage();
     second.on('console', (message) => heard.console.push(message.text()));
     await second.goto(page.url());
-    await standing(second);
+    await briefed(second);
     await says(second, 'Read only: another tab has this study open.');
     const before = await shown(second, 'no-pier width');
     await type(second, 'no-pier width', '90');
