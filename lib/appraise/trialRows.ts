@@ -8,6 +8,7 @@ import { depthRange } from './depthRange.ts';
 import type { Kept } from '../kept.ts';
 import { aloneSpanWork, endSpanWork, type DeckLoads } from './endSpanWork.ts';
 import { openSpans } from './openSpans.ts';
+import { quakeOn } from './quakeOn.ts';
 import { leastCostDepth } from './leastCostDepth.ts';
 import type { TrialRow } from './memory.ts';
 import type { Sizer } from './sizer.ts';
@@ -109,6 +110,7 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     standard: site.standard,
     planRadiusM: site.planRadiusM ?? Infinity,
     ...(formModule(form).ignoresHeight ? {} : { clearM: meanClearance(site) }),
+    ...quakeOn(site, formModule(form)),
   };
 
   const unitOver = (spanM: number, pylons: 1 | 2) => trialUnit(form, spanM, pylons, site.lengthM);

@@ -25,6 +25,7 @@ import { askedTask, spansOf } from './askedTask.ts';
 import type { DepthTrial } from './leastCostDepth.ts';
 import type { AtDepth } from './memory.ts';
 import { profileOrNearest } from './profileOrNearest.ts';
+import { quakeOn } from './quakeOn.ts';
 import type { Workbench } from './workbench.ts';
 
 /** The unit a form was chosen for; a crossing of one unit has only that. */
@@ -75,6 +76,7 @@ function taskOf(
       ? {}
       : { clearUnderM: unit.supportsM.map((x) => Math.round(clear(x) / CLEAR_CLASS_M) * CLEAR_CLASS_M) }),
     ...(module.wallsInOne ? strikesOn(site, unit) : {}),
+    ...quakeOn(site, module),
   };
 }
 

@@ -124,6 +124,21 @@ export const designFigures: readonly Descriptor[] = [
     }),
   ),
   described({
+    path: unit('task/quakeShare'),
+    label: (at) => `horizontal force of an earthquake, share of the weight${name(at)}`,
+    unit: '',
+    method: 'product',
+    formula: 'acceleration x soil x amplification / behaviour, on the plateau of the spectrum',
+    inputs: (at) => ({
+      acceleration: 'site/seismic/groundAccelerationG',
+      soil: `data/substructure/seismic/soil${at.site.seismic!.siteClass ?? 'E'}`,
+      amplification: 'data/substructure/seismic/amplification',
+      behaviour: 'data/substructure/seismic/behaviour',
+    }),
+    compute: (v) => (v.acceleration * v.soil * v.amplification) / v.behaviour,
+    sources: ['EN 1998-1 3.2.2.2, EN 1998-2 table 4.1 (from memory)'],
+  }),
+  described({
     path: unit('task/girders'),
     label: `girders asked for`,
     unit: 'no',

@@ -29,7 +29,7 @@ export interface FormModule {
   readonly joined?: 'after-placing' | 'never';
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
   readonly ignoresHeight?: true;
-  /** Inner supports are walls in one with the deck: `strikes` of its task is read. */
+  /** All supports are walls in one with the deck: `strikes` and `quakeShare` of its task are read. */
   readonly wallsInOne?: true;
   /** Of the choices of a variant those that the form has. */
   readonly choices?: readonly (keyof Variant)[];

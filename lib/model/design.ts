@@ -42,6 +42,8 @@ export interface UnitTask {
   readonly clearUnderM?: readonly number[];
   /** Portal frames: what may strike the wall at each support; none when absent. */
   readonly strikes?: readonly (readonly Strike[])[];
+  /** Portal frames: horizontal force of an earthquake as a share of the weight, 0 or more; none when absent. */
+  readonly quakeShare?: number;
 }
 
 /** A vehicle, train or vessel against a support: characteristic force along and across the road, kN, at a height above ground, m. */
@@ -127,13 +129,28 @@ export interface IntegralWall {
   /** Movement of the end of the deck from warm to cold with shrinkage, mm. */
   readonly movementMm: number;
   /** Characteristic loads on the foundation, kN and kNm, pressure of the fill on the wall included; along and moment positive towards the span. */
-  readonly loads: readonly {
-    readonly verticalKN: number;
-    readonly alongKN: number;
-    readonly momentKNm: number;
+  readonly loads: readonly (WallLoad & {
     /** Accidental: what strikes the wall; its force along is in these loads, that across is not. */
     readonly struck?: Strike;
-  }[];
+  })[];
+  /** What an earthquake puts on the foundation, the frame on feet of each kind; absent where none is reckoned with. */
+  readonly quake?: readonly WallQuake[];
+}
+
+/** Loads on the foundation of a wall in one with the deck, kN and kNm; along and moment positive towards the span. */
+export interface WallLoad {
+  readonly verticalKN: number;
+  readonly alongKN: number;
+  readonly momentKNm: number;
+}
+
+/** An earthquake in full along and in full across: what rests there without it, and what it adds either way. */
+export interface WallQuake {
+  readonly rest: WallLoad;
+  readonly along: WallLoad;
+  readonly acrossKN: number;
+  /** Height over the top of the foundation at which the force across acts, m. */
+  readonly acrossAboveM: number;
 }
 
 /** A sized unit. */

@@ -1,5 +1,6 @@
 export { deckOnSupport, standPierBetween } from './standPierBetween.ts';
 export { trialAsk, type DeckOnSupport } from './trialAsk.ts';
+export { seismicLoad } from './seismicLoad.ts';
 export { strikesAt } from './strikesAt.ts';
 export { settingAt, type Setting } from './setting.ts';
 export { placeText } from './placeText.ts';

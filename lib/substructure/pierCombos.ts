@@ -1,6 +1,6 @@
 import type { Combo } from './combos.ts';
 import { substructureData } from './data.ts';
-import type { SeismicLoad } from './seismicLoad.ts';
+import { quakeDirections, type SeismicLoad } from './seismicLoad.ts';
 import type { Setting } from './setting.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import { strikesAt } from './strikesAt.ts';
@@ -91,14 +91,10 @@ function seismicCombos(
   bearingLevelM: number,
   shaftKN: number,
 ): Combo[] {
-  const { orthogonalShare, shaftShare } = substructureData.seismic;
-  const shaft = shaftShare * shaftKN;
+  const shaft = substructureData.seismic.shaftShare * shaftKN;
   const along = pierShare * (Math.max(0, ask.heldAlongKN) + shaft);
   const across = pierShare * (Math.max(0, ask.permanentKN) + shaft);
-  return [
-    [1, orthogonalShare],
-    [orthogonalShare, 1],
-  ].map(([a = 0, b = 0]) => ({
+  return quakeDirections().map(([a, b]) => ({
     verticalKN: ask.permanentKN + shaftKN,
     alongKN: a * along,
     alongLevelM: bearingLevelM,

@@ -1,6 +1,15 @@
 import type { Site } from '../model/index.ts';
 import { substructureData } from './data.ts';
 
+/** Shares of an earthquake along and across the road that come together: one in full with a part of the other. */
+export function quakeDirections(): readonly (readonly [along: number, across: number])[] {
+  const { orthogonalShare } = substructureData.seismic;
+  return [
+    [1, orthogonalShare],
+    [orthogonalShare, 1],
+  ];
+}
+
 /** What an earthquake asks of supports: horizontal force as a share of the weight that moves. */
 export interface SeismicLoad {
   /** Of a deck that a pier of limited ductility holds: acceleration x soil x 2.5 / 1.5, on the plateau of the spectrum. */

@@ -1,4 +1,4 @@
-import type { IntegralWall, Site, Support } from '../model/index.ts';
+import type { IntegralWall, Site, Support, WallQuake } from '../model/index.ts';
 import { constructionDepth } from '../site/index.ts';
 import type { Combo } from './combos.ts';
 import { substructureData } from './data.ts';
@@ -6,6 +6,7 @@ import type { FoundationTask } from './foot.ts';
 import { foundationFor } from './foundationFor.ts';
 import { groundUnder } from './groundUnder.ts';
 import { accidentalCapacity } from './pierCombos.ts';
+import { quakeDirections } from './seismicLoad.ts';
 import { scourDepth, settingAt } from './setting.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import { line, waterAccessLines } from './supportLines.ts';
@@ -14,8 +15,9 @@ import { wingFootingLines, wingsOf, wingWallsLine } from './wings.ts';
 /**
  * A wall in one with the deck: no bearings, no joint. The wall itself stands in the lines of the design; here are, of one at
  * an end, its wings, and on every ground the foundation under it, sized for vertical load, thrust and moment as the frame
- * puts them down, the pressure of the fill in them, with the fill on the heel at an end and wind across. A wall between two
- * spans may be struck; one at an end has the fill behind it, like any abutment.
+ * puts them down, the pressure of the fill in them, with the fill on the heel at an end and wind across, and for an
+ * earthquake either way along with a share of it across, and the other way round. A wall between two spans may be struck;
+ * one at an end has the fill behind it, like any abutment.
  */
 export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWall): Support {
   const { abutment, piles, factors } = substructureData;
@@ -33,16 +35,19 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
     ...(ask.index === undefined ? {} : { support: ask.index }),
     shaftLengthM: wall.footM,
     shaftWidthM: widthM,
-    combos: wall.loads.map(({ verticalKN, alongKN, momentKNm, struck }): Combo => ({
-      verticalKN,
-      alongKN,
-      alongLevelM: footM,
-      momentAlongKNm: momentKNm,
-      acrossKN: struck ? struck.acrossKN : acrossKN,
-      acrossLevelM: struck ? setting.groundLevelM + struck.aboveGroundM : slabM,
-      capacity: struck ? accidentalCapacity : 1,
-      ultimate: 1,
-    })),
+    combos: [
+      ...wall.loads.map(({ verticalKN, alongKN, momentKNm, struck }): Combo => ({
+        verticalKN,
+        alongKN,
+        alongLevelM: footM,
+        momentAlongKNm: momentKNm,
+        acrossKN: struck ? struck.acrossKN : acrossKN,
+        acrossLevelM: struck ? setting.groundLevelM + struck.aboveGroundM : slabM,
+        capacity: struck ? accidentalCapacity : 1,
+        ultimate: 1,
+      })),
+      ...(wall.quake ?? []).flatMap((quake) => quakeCombos(quake, footM)),
+    ],
     groundLevelM: Math.min(setting.groundLevelM, footM + piles.capCoverM),
     waterLevelM: setting.waterLevelM,
     scourM: scourDepth(setting, isEnd ? 0 : wall.footM),
@@ -102,3 +107,18 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
     foundations: ground.classes.map((odds) => foundationFor(task, odds)),
   };
 }
+
+/** An earthquake either way along the road with a share of it across, and the other way round. */
+const quakeCombos = ({ rest, along, acrossKN, acrossAboveM }: WallQuake, footM: number): Combo[] =>
+  quakeDirections().flatMap(([a, b]) =>
+    [a, -a].map((share) => ({
+      verticalKN: rest.verticalKN + share * along.verticalKN,
+      alongKN: rest.alongKN + share * along.alongKN,
+      alongLevelM: footM,
+      momentAlongKNm: rest.momentKNm + share * along.momentKNm,
+      acrossKN: b * acrossKN,
+      acrossLevelM: footM + acrossAboveM,
+      capacity: accidentalCapacity,
+      ultimate: 1,
+    })),
+  );

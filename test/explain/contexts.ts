@@ -156,7 +156,7 @@ export const frame = (): Context =>
     };
   });
 
-/** The same over two unequal spans with a wall between them, kept by hand beside what is found. */
+/** The same over two unequal spans with a wall between them, kept by hand beside what is found, and an earthquake. */
 export const frameOfTwo = (): Context =>
   once('frameOfTwo', () => {
     const { study } = frame();
@@ -166,7 +166,7 @@ export const frameOfTwo = (): Context =>
       ...study,
       brief: {
         ...brief,
-        crossing: { ...brief.crossing, endM: 138 },
+        crossing: { ...brief.crossing, endM: 138, groundAccelerationG: 0.12, siteClass: 'B' },
         obstacles: [road!, { ...road!, name: 'Mill Lane', fromM: 124, toM: 132, clearance: null }],
       },
       books: { ...books, draws: 300 },

@@ -1,4 +1,5 @@
 import { expect, it } from 'vitest';
+import { quakeOn } from '../../lib/appraise/quakeOn.ts';
 import { portalFrame } from '../../lib/forms/portal-frame/index.ts';
 import type { Design, MeasuredLine, Support, UnitTask } from '../../lib/model/index.ts';
 import { constructionDepth } from '../../lib/site/index.ts';
@@ -136,4 +137,39 @@ it('strikesAt() is the vehicle along the road, and the vessel across it or with 
     { alongKN: 0, acrossKN: 24_000, aboveGroundM: 3 },
     { alongKN: 12_000, acrossKN: 0, aboveGroundM: 3 },
   ]);
+});
+
+it('standSupports(frame in an earthquake) puts it into the footings, along and across, at half again of what the ground may carry', () => {
+  const stoodAt = (quakeShare: number): { readonly design: Design; readonly supports: Support[] } => {
+    const design = portalFrame.size({ ...frame().task, quakeShare });
+    return { design, supports: stood(design) };
+  };
+  const plan = ({ foundations }: Support): number =>
+    foundations[0]!.footing.lengthM * foundations[0]!.footing.widthM;
+  const [calm, weak, strong] = [0, 0.02, 0.6].map(stoodAt);
+  calm!.supports.forEach((support, s) => {
+    // By hand: 2 % of the weight along, less than half of what the ground carries already, asks for no more of it.
+    expect(plan(weak!.supports[s]!)).toBe(plan(support));
+    expect(plan(strong!.supports[s]!)).toBeGreaterThan(1.1 * plan(support));
+    // What holds the deck from day to day is not the earthquake.
+    expect(strong!.supports[s]!.articulation.alongKN).toBeCloseTo(support.articulation.alongKN, -2);
+    // It stands under what comes along in full with 0.3 of it across: no slip, the resultant within the footing.
+    const [quake] = strong!.design.walls![s]!.quake!;
+    const { footing } = strong!.supports[s]!.foundations[0]!;
+    const own = footing.lengthM * footing.widthM * footing.depthM * 25;
+    const fill =
+      0.65 * (footing.lengthM - strong!.supports[s]!.shaft.lengthM) * 12 * (10 - footing.topLevelM) * 19;
+    for (const sign of [1, -1]) {
+      const down = quake!.rest.verticalKN + sign * quake!.along.verticalKN + own + fill;
+      const along = quake!.rest.alongKN + sign * quake!.along.alongKN;
+      expect(Math.hypot(along, 0.3 * quake!.acrossKN)).toBeLessThanOrEqual(0.4 * 1.5 * down);
+    }
+  });
+});
+
+it('quakeOn(site) asks of walls in one with the deck what it asks of piers, of a deck on bearings nothing', () => {
+  const seismic = { groundAccelerationG: 0.2, siteClass: 'C' } as const;
+  expect(quakeOn({ seismic }, portalFrame).quakeShare).toBeCloseTo((0.2 * 1.15 * 2.5) / 1.5, 12);
+  expect(quakeOn({ seismic }, {})).toEqual({});
+  expect(quakeOn({ seismic: null }, portalFrame)).toEqual({});
 });

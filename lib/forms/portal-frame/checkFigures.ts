@@ -14,12 +14,15 @@ const actions = [
   './task/deck/superimposedKNm',
 ] as const;
 const design =
-  'worst of stiff and soft feet: own weight, superimposed load, fill (least, at rest or K*), temperature, shrinkage, surcharge, traffic of the heaviest metre x width, braking, each where it adds; or a middle wall struck either way beside permanent loads, fill and half of the temperature, without traffic, factors of 1';
+  'worst of stiff and soft feet: own weight, superimposed load, fill (least, at rest or K*), temperature, shrinkage, surcharge, traffic of the heaviest metre x width, braking, each where it adds; or a middle wall struck either way beside permanent loads, fill and half of the temperature, without traffic, factors of 1; or an earthquake either way beside permanent loads and fill, factors of 1';
+
+/** What the frame is bent by in an earthquake; nothing without one. */
+const quake = 'quake*';
 
 const bending = (id: string, ...own: readonly string[]): Descriptor[] => [
   ...check(
     `bending-${id}`,
-    [design, ...actions, ...own, 'pressedEarth', 'vehicleWidthM'],
+    [design, ...actions, ...own, 'pressedEarth', 'vehicleWidthM', quake],
     [
       'strands and the most bars that fit at their design strength x lever, with the thrust that comes with the moment',
       './task/depthM',
@@ -67,10 +70,26 @@ export const portalChecks: readonly Descriptor[] = [
     ],
     'EN 1992-1-1 6.1 (from memory)',
   ),
+  ...check(
+    'quake-across',
+    [
+      'share of the weight x (own weight of the wall and what rests on it) x its height over the footing, the wall a cantilever',
+      'quakeKN',
+      'firstHeightM',
+      'middleHeightM',
+      'lastHeightM',
+    ],
+    [
+      'half of the upright bars on a lever of their own, with the weight on the wall',
+      'wallFootM',
+      './task/deck/widthM',
+    ],
+    'EN 1998-2 4.1.6, EN 1992-1-1 6.1 (from memory)',
+  ),
   ...['shear', 'shear-walls'].flatMap((id) =>
     check(
       id,
-      [id === 'shear' ? `${design}; an effective depth off the walls` : design, ...actions],
+      [id === 'shear' ? `${design}; an effective depth off the walls` : design, ...actions, quake],
       [
         'the more of the concrete alone and the most links',
         './task/depthM',

@@ -109,49 +109,6 @@ export function combinations(
   }));
 }
 
-/**
- * A wall struck, on stiff and on soft feet: permanent loads, fill with its least or at rest, prestress and the usual share of
- * temperature with the force either way, all with a factor of 1, without traffic (EN 1990 6.4.3.3, from memory; the share of
- * temperature that is there most of the time is that of the frequent one, table A2.1).
- */
-export function struckCombinations(
-  model: FrameModel,
-  traffic: FrameTraffic,
-  parasitic: readonly ChainEffects[] | null,
-): Combination[] {
-  const { earth, temperature, service, cracked } = portalData;
-  const warm = service.frequentTemperature * (model.prestressed ? 1 : cracked.share);
-  const perK = temperature.expansion1PerK / 1e-5;
-  return model.cases.flatMap((one, k) =>
-    one.strikes.flat().map((strike): Combination => ({
-      traffic: traffic.cases[k]!,
-      braking: one.braking,
-      shares: [],
-      actions: [
-        [[one.own, 1]],
-        [[one.superimposed, 1]],
-        [
-          [one.earth, earth.activePressure],
-          [one.earth, earth.restPressure],
-        ],
-        [
-          [one.longer, warm * perK * temperature.warmerK],
-          [one.longer, -warm * perK * temperature.colderK],
-        ],
-        [
-          [one.topWarmer, warm * temperature.topWarmerK],
-          [one.topWarmer, -warm * temperature.topCoolerK],
-        ],
-        [
-          [strike, 1],
-          [strike, -1],
-        ],
-        ...(parasitic ? [[[parasitic[k]!, 1]] satisfies Action] : []),
-      ],
-    })),
-  );
-}
-
 /** Characteristic braking force of the deck, kN. */
 export function brakingOf({ standard, task, shape }: FrameModel): number {
   const { perLane, constantKN, perMKN, leastKN, mostKN } = standard.braking;

@@ -143,6 +143,25 @@ export const portalFigures: readonly Descriptor[] = [
     'plane frame, the worse of stiff and soft feet',
     ['middleStruckKN', 'data/portal-frame/foot/stiffKNm3', 'data/portal-frame/foot/softKNm3'],
   ),
+  figure('quakeKN', {
+    label: 'force of an earthquake along the road',
+    unit: 'kN',
+    method: 'product',
+    formula: 'share of the weight x permanent load of all walls',
+    inputs: (at) => ({
+      share: `${at.unit}/task/quakeShare`,
+      permanent: at.design.reactions.map((_, s) => `${at.unit}/reactions/${s}/permanentKN`),
+    }),
+    compute: ({ share, permanent }) => share * sum(permanent),
+    sources: ['EN 1998-2 4.1.6 and 5.5 (from memory)'],
+  }),
+  statics(
+    'quakeWallKNm',
+    'greatest moment of that force alone in a wall',
+    'kNm',
+    'plane frame, deck and walls drawn by their weight, the worse of stiff and soft feet',
+    ['quakeKN', 'data/portal-frame/foot/stiffKNm3', 'data/portal-frame/foot/softKNm3'],
+  ),
   statics('thrustOwnKN', 'own-weight thrust outwards, stiff feet', 'kN', 'plane frame', onFeet),
   statics(
     'thrustOwnSoftKN',

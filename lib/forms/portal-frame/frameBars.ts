@@ -4,7 +4,8 @@ import { slabData } from '../common/slab/slabData.ts';
 import { bendingCapacity, compressionDepth, strandDesignMPa } from '../concrete-box/bendingCapacity.ts';
 import { crackWidthMm, serviceBars } from '../slab/crackedSection.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
-import { combinations, struckCombinations, worstMoment, type Combination, type Combined } from './combine.ts';
+import { strengthCombinations } from './accidental.ts';
+import { combinations, worstMoment, type Combination, type Combined } from './combine.ts';
 import { deckDesignNodes, type FrameModel } from './frameModel.ts';
 import type { FrameWall } from './frameShape.ts';
 import type { FrameTendons } from './frameTendons.ts';
@@ -62,10 +63,7 @@ export function frameBars(
   tendons: FrameTendons | null,
 ): FaceBars[] {
   const parasitic = tendons?.parasitic ?? null;
-  const ultimate = [
-    ...combinations(model, traffic, 'ultimate', parasitic),
-    ...struckCombinations(model, traffic, parasitic),
-  ];
+  const ultimate = strengthCombinations(model, traffic, parasitic);
   const characteristic = combinations(model, traffic, 'characteristic', parasitic);
   const frequent = combinations(model, traffic, 'frequent', parasitic);
   const deck = deckDesignNodes(model.shape);

@@ -1,45 +1,10 @@
 import type { Check } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
-import { bendingCapacity, compressionDepth } from '../concrete-box/bendingCapacity.ts';
 import type { FaceBars } from './frameBars.ts';
 import type { FrameModel } from './frameModel.ts';
 import { portalData } from './portalData.ts';
 import type { SizedFrame } from './sizeFrame.ts';
-
-/** Centroid of the half of evenly spread bars that is in tension, from the pressed edge of a wall: share of its width. */
-const PULLED_BARS_AT = 0.75;
-
-/**
- * A wall struck across the road by a vessel as a cantilever off its footing, without what the deck would hold of it: bending
- * in its plane against its weight and that of the deck with half of its upright bars. Null where nothing strikes it so.
- */
-function struckAcross(
-  model: FrameModel,
-  { faces }: SizedFrame,
-): { readonly demandKNm: number; readonly capacityKNm: number } | null {
-  const { shape, task, cases } = model;
-  const demands = shape.walls.flatMap(({ struck, heightM }, w) =>
-    struck.map((node, k) => task.strikes![w]![k]!.acrossKN * (heightM + shape.nodes[node]![1])),
-  );
-  const demandKNm = Math.max(0, ...demands);
-  if (!(demandKNm > 0)) return null;
-  const middle = shape.walls.findIndex(({ name }) => name === 'middle');
-  const { footM } = shape.walls[middle]!;
-  const { widthM } = task.deck;
-  const barM2 = faces
-    .filter(({ id }) => id === 'middle-left' || id === 'middle-right')
-    .reduce((sum, { placedM2 }) => sum + placedM2[0]!, 0);
-  const plane = { widthM: footM, flangeM: widthM, websM: footM };
-  const steel = { barM2: barM2 / 2, barDepthM: PULLED_BARS_AT * widthM, strandM2: 0, strandDepthM: 0 };
-  const { own, superimposed } = cases[0]!;
-  const weightKN = own.feet[middle]!.verticalKN + superimposed.feet[middle]!.verticalKN;
-  return {
-    demandKNm,
-    capacityKNm:
-      bendingCapacity(model, steel, plane) +
-      weightKN * (widthM / 2 - compressionDepth(model, plane, weightKN)),
-  };
-}
+import { shakenAcross, struckAcross } from './wallAcross.ts';
 
 /** All limit states of a sized frame; labels as they are printed. */
 export function frameChecks(model: FrameModel, sized: SizedFrame): Check[] {
@@ -92,17 +57,19 @@ export function frameChecks(model: FrameModel, sized: SizedFrame): Check[] {
       )
       .reduce((a, b) => (b.utilisation > a.utilisation ? b : a)),
   ];
-  const across = struckAcross(model, sized);
-  if (across)
-    checks.push(
-      check(
-        'wall-across',
-        'the middle wall struck across the road, bending in its own plane',
-        across.demandKNm,
-        across.capacityKNm,
-        'kNm',
-      ),
-    );
+  for (const [id, label, across] of [
+    [
+      'wall-across',
+      'the middle wall struck across the road, bending in its own plane',
+      struckAcross(model, sized),
+    ],
+    [
+      'quake-across',
+      'a wall in an earthquake across the road, bending in its own plane',
+      shakenAcross(model, sized),
+    ],
+  ] as const)
+    if (across) checks.push(check(id, label, across.demandKNm, across.capacityKNm, 'kNm'));
   if (tendons)
     checks.push(
       check(

@@ -1,6 +1,6 @@
-import type { IntegralWall } from '../../model/index.ts';
+import type { IntegralWall, WallLoad, WallQuake } from '../../model/index.ts';
 import { brakingOf } from './combine.ts';
-import type { FootLoad, FrameModel } from './frameModel.ts';
+import type { FrameModel } from './frameModel.ts';
 import { portalData } from './portalData.ts';
 import type { SizedFrame } from './sizeFrame.ts';
 
@@ -35,9 +35,9 @@ export function footLoads(
     const least = times(one.earth.feet[wall]!, earth.activePressure);
     const pressed = one.pressedEarth.feet[wall]!;
     const behind = ends.map((end) => one.surcharge[end]!.feet[wall]!);
-    const warm = (share: number): FootLoad =>
+    const warm = (share: number): WallLoad =>
       times(one.longer.feet[wall]!, share * perK * temperature.warmerK);
-    const cold = (share: number): FootLoad =>
+    const cold = (share: number): WallLoad =>
       times(one.longer.feet[wall]!, -share * perK * temperature.colderK + dry);
     const beside = service.characteristicTemperature;
     const braked = bothWays(times(one.braking.feet[wall]!, brakingKN)).flatMap((braking) => {
@@ -78,15 +78,48 @@ export function footLoads(
   });
 }
 
-const bothWays = (load: FootLoad): FootLoad[] => [load, times(load, -1)];
+/**
+ * An earthquake on the footing of a wall, on stiff and on soft feet, beside permanent loads and fill at rest; what imposed
+ * movements do is not there as well (EN 1998-2 5.5, from memory). Along, deck and walls are drawn by their share of all weight
+ * and the walls share it by stiffness; across, a wall takes it of what rests on it and of itself, that of the deck on its top.
+ */
+export function footQuake(
+  model: FrameModel,
+  { tendons }: SizedFrame,
+  wall: number,
+  quakeShare: number,
+): WallQuake[] {
+  return model.cases.map((one, k): WallQuake => {
+    const held = [one.own.feet[wall]!, one.superimposed.feet[wall]!];
+    const parasitic = tendons ? [tendons.parasitic[k]!.feet[wall]!] : [];
+    const fill = times(one.earth.feet[wall]!, portalData.earth.restPressure);
+    const { verticalKN } = total(held);
+    return {
+      rest: total([...held, ...parasitic, fill]),
+      along: times(one.weightAlong.feet[wall]!, quakeShare),
+      acrossKN: quakeShare * verticalKN,
+      acrossAboveM: weightAboveM(model, wall, verticalKN),
+    };
+  });
+}
 
-const times = (load: FootLoad, factor: number): FootLoad => ({
+/** Height over the footing of the weight on a wall and of its own, m: the deck counts at its top. */
+export function weightAboveM(model: FrameModel, wall: number, verticalKN: number): number {
+  const { heightM, topM, footM } = model.shape.walls[wall]!;
+  const ownKN = model.standard.unitWeights.concreteKNm3 * model.wallM3[wall]!;
+  const middleM = ((heightM - model.shape.kneeM) / 3) * ((footM + 2 * topM) / (footM + topM));
+  return ((verticalKN - ownKN) * heightM + ownKN * middleM) / verticalKN;
+}
+
+const bothWays = (load: WallLoad): WallLoad[] => [load, times(load, -1)];
+
+const times = (load: WallLoad, factor: number): WallLoad => ({
   verticalKN: factor * load.verticalKN,
   alongKN: factor * load.alongKN,
   momentKNm: factor * load.momentKNm,
 });
 
-const total = (loads: readonly FootLoad[]): FootLoad =>
+const total = (loads: readonly WallLoad[]): WallLoad =>
   loads.reduce((a, b) => ({
     verticalKN: a.verticalKN + b.verticalKN,
     alongKN: a.alongKN + b.alongKN,

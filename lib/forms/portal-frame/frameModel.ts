@@ -1,6 +1,6 @@
 import { concrete, loadStandard, materials, type Concrete, type LoadStandard } from '../../actions/index.ts';
 import { frameEffects, planeFrame, type FrameEffects, type FrameLoad } from '../../mechanics/index.ts';
-import type { StandardId, UnitTask } from '../../model/index.ts';
+import type { StandardId, UnitTask, WallLoad } from '../../model/index.ts';
 import { pressureAt, pressureOnNodes, ratchetPressure } from './earth.ts';
 import { frameShape, type FrameShape } from './frameShape.ts';
 import { portalData } from './portalData.ts';
@@ -14,15 +14,9 @@ export interface ChainEffects {
   /** In the members. */
   readonly shearKN: Float64Array;
   /** On the footings: downwards, towards the span, moment that turns it towards the span; of a middle wall towards the last. */
-  readonly feet: readonly FootLoad[];
+  readonly feet: readonly WallLoad[];
   /** Downwards at the middle of each span, m. */
   readonly middlesM: readonly number[];
-}
-
-export interface FootLoad {
-  readonly verticalKN: number;
-  readonly alongKN: number;
-  readonly momentKNm: number;
 }
 
 /** The frame on feet of one kind, with every action worked out alone. */
@@ -37,6 +31,8 @@ export interface FrameOnFeet {
   readonly pressure: number;
   /** Traffic behind one wall, at rest. */
   readonly surcharge: readonly [ChainEffects, ChainEffects];
+  /** All permanent weight of deck and walls turned along the road, towards the end of the deck. */
+  readonly weightAlong: ChainEffects;
   /** 1 kN along the deck, towards its end. */
   readonly braking: ChainEffects;
   /** Each strike on its wall: its force along, towards the end of the deck. */
@@ -169,9 +165,9 @@ export function frameModel(task: UnitTask): FrameModel {
       feet === 'stiff' ? earth.stiffFactor : earth.softFactor,
     );
     const surchargeKPa = earth.restPressure * earth.surchargeKPa;
-    const along = (node: number, kN: number): ChainEffects => {
+    const along = (forces: Iterable<readonly [node: number, kN: number]>): ChainEffects => {
       const nodal = new Float64Array(3 * n);
-      nodal[3 * node] = kN;
+      for (const [node, kN] of forces) nodal[3 * node]! += kN;
       return run({ nodal });
     };
     return {
@@ -184,9 +180,10 @@ export function frameModel(task: UnitTask): FrameModel {
       ),
       pressure,
       surcharge: [pushed([0], () => surchargeKPa), pushed([1], () => surchargeKPa)],
-      braking: along(middles[0]!, 1),
+      weightAlong: along([...halves(ownKN, members), ...halves(superimposedKN, members)]),
+      braking: along([[middles[0]!, 1]]),
       strikes: walls.map(({ struck }, w) =>
-        struck.map((node, k) => along(node, task.strikes![w]![k]!.alongKN)),
+        struck.map((node, k) => along([[node, task.strikes![w]![k]!.alongKN]])),
       ),
       longer: run({ strain: inDeck.map((one) => one * 1e-5) }),
       topWarmer: run({

@@ -1,6 +1,6 @@
 import type { IntegralWall, SupportReaction } from '../../model/index.ts';
 import { worstMoment, combinations } from './combine.ts';
-import { footLoads, wallMovementMm } from './frameFeet.ts';
+import { footLoads, footQuake, wallMovementMm } from './frameFeet.ts';
 import { strandKg } from './frameLines.ts';
 import type { FrameModel } from './frameModel.ts';
 import type { SizedFrame } from './sizeFrame.ts';
@@ -18,6 +18,7 @@ export function frameReactions(model: FrameModel, { traffic }: SizedFrame): Supp
 
 /** The walls as their foundations and the take-off see them. */
 export function frameWalls(model: FrameModel, sized: SizedFrame): IntegralWall[] {
+  const { quakeShare = 0 } = model.task;
   return model.shape.walls.map(({ footM, heightM }, wall) => ({
     support: wall,
     footM,
@@ -26,6 +27,7 @@ export function frameWalls(model: FrameModel, sized: SizedFrame): IntegralWall[]
     reinforcementKg: sized.wallBarsKg[wall]!.upright + sized.wallBarsKg[wall]!.level,
     movementMm: wallMovementMm(model, wall),
     loads: footLoads(model, sized, wall),
+    ...(quakeShare > 0 ? { quake: footQuake(model, sized, wall, quakeShare) } : {}),
   }));
 }
 
@@ -52,6 +54,21 @@ function struckFigures(
     strikes[at]!.flatMap(({ momentKNm }) => wall.nodes.map((node) => Math.abs(momentKNm[node]!))),
   );
   return { middleStruckKN: Math.max(...forces), middleStruckKNm: Math.max(...moments) };
+}
+
+/** Force of an earthquake along the road, and its greatest moment alone in any wall; nothing without one. */
+function quakeFigures({ task, shape, cases }: FrameModel): Record<string, number> {
+  const { quakeShare = 0 } = task;
+  if (!(quakeShare > 0)) return {};
+  const moments = cases.flatMap(({ weightAlong: { momentKNm } }) =>
+    shape.walls.flatMap(({ nodes }) => nodes.map((node) => quakeShare * Math.abs(momentKNm[node]!))),
+  );
+  const { own, superimposed } = cases[0]!;
+  const weightKN = [own, superimposed].reduce(
+    (sum, { feet }) => feet.reduce((all, { verticalKN }) => all + verticalKN, sum),
+    0,
+  );
+  return { quakeKN: quakeShare * weightKN, quakeWallKNm: Math.max(...moments) };
 }
 
 /** Named figures of shape, statics and steel. */
@@ -84,6 +101,7 @@ export function frameFigures(model: FrameModel, sized: SizedFrame): Record<strin
           ...struckFigures(model, middleWall),
         }
       : {}),
+    ...quakeFigures(model),
     wingM: shape.wingM,
     kneeOwnKNm: -stiff!.own.momentKNm[knee]!,
     kneeOwnSoftKNm: -soft!.own.momentKNm[knee]!,

@@ -1,7 +1,8 @@
 import { barDesignMPa } from '../common/bars.ts';
 import { concreteShearMPa } from '../slab/slabShear.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
-import { combinations, struckCombinations, worstShear } from './combine.ts';
+import { strengthCombinations } from './accidental.ts';
+import { worstShear } from './combine.ts';
 import type { FaceBars } from './frameBars.ts';
 import type { FrameModel } from './frameModel.ts';
 import type { FrameTendons } from './frameTendons.ts';
@@ -26,11 +27,7 @@ export function frameShear(
 ): { readonly deck: PartShear; readonly walls: PartShear } {
   const { shape, members, memberM } = model;
   const { nodes, sections, knees, walls, legTopM } = shape;
-  const parasitic = tendons?.parasitic ?? null;
-  const all = [
-    ...combinations(model, traffic, 'ultimate', parasitic),
-    ...struckCombinations(model, traffic, parasitic),
-  ];
+  const all = strengthCombinations(model, traffic, tendons?.parasitic ?? null);
   const { prestress } = model.standard.factors.uls;
   const bars = leastBars(model, faces);
   const parts = { deck: none(), walls: none() };

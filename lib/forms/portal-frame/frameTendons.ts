@@ -1,9 +1,10 @@
 import { concrete, materials } from '../../actions/index.ts';
+import type { WallLoad } from '../../model/index.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { tendonStress, type TendonStress } from '../concrete-box/tendonForce.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
 import { combinations, worstMoment } from './combine.ts';
-import { deckDesignNodes, type ChainEffects, type FootLoad, type FrameModel } from './frameModel.ts';
+import { deckDesignNodes, type ChainEffects, type FrameModel } from './frameModel.ts';
 import { spanAt } from './frameShape.ts';
 import type { FrameTraffic } from './frameTraffic.ts';
 import { portalData } from './portalData.ts';
@@ -188,7 +189,7 @@ function restrained(
 }
 
 function scaled(effects: ChainEffects, factor: number): ChainEffects {
-  const foot = ({ verticalKN, alongKN, momentKNm }: FootLoad): FootLoad => ({
+  const foot = ({ verticalKN, alongKN, momentKNm }: WallLoad): WallLoad => ({
     verticalKN: factor * verticalKN,
     alongKN: factor * alongKN,
     momentKNm: factor * momentKNm,

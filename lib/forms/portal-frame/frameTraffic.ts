@@ -1,7 +1,8 @@
 import { trafficOnDeck, trafficOnInfluence, type TrafficLoad } from '../../actions/index.ts';
 import { loadTrack, type Track } from '../../mechanics/index.ts';
+import type { WallLoad } from '../../model/index.ts';
 import { wheelStrips, type WheelStrips } from '../slab/wheelStrips.ts';
-import type { FootLoad, FrameModel, FrameOnFeet } from './frameModel.ts';
+import type { FrameModel, FrameOnFeet } from './frameModel.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
 import { portalData } from './portalData.ts';
 
@@ -15,8 +16,8 @@ export interface TrafficRange {
 
 /** Loads of all lanes on the feet: one span full with the vehicles in its middle, all full with the vehicles over a wall. */
 export interface LanesOnFeet {
-  readonly inSpan: readonly (readonly FootLoad[])[];
-  readonly overWall: readonly (readonly FootLoad[])[];
+  readonly inSpan: readonly (readonly WallLoad[])[];
+  readonly overWall: readonly (readonly WallLoad[])[];
 }
 
 /** Traffic on a frame. Moments and shears are those of its heaviest metre times the width of the deck. */
@@ -141,7 +142,7 @@ function onFeet(
   const vehiclesKN = load.vehicleFactor * heaviest * (1 + standard.dynamicAllowance);
   const evenKNm = load.udlKNm + load.footwayKNm;
   const knees = shape.walls.map(({ knee }) => knee - deckNodes[0]!);
-  const sum = (at: number, from: number, to: number): FootLoad[] =>
+  const sum = (at: number, from: number, to: number): WallLoad[] =>
     shape.walls.map((_, wall) => {
       let verticalKN = 0;
       let alongKN = 0;

@@ -26,7 +26,7 @@ export const portalFrame: FormModule = {
   size,
 };
 
-/** @throws RangeError for more than two spans, depths or widths that are not possible, or strikes that do not go with the walls */
+/** @throws RangeError for more than two spans, depths or widths that are not possible, strikes that do not go with the walls, or an earthquake less than none */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
   if (task.spansM.length > 2)
@@ -36,6 +36,10 @@ function size(task: UnitTask): Design {
   if (task.strikes && task.strikes.length !== task.spansM.length + 1)
     throw new RangeError(
       `strikes: expected a list for each of ${task.spansM.length + 1} walls, received ${task.strikes.length}; leave it out where nothing strikes them`,
+    );
+  if (task.quakeShare !== undefined && !(task.quakeShare >= 0))
+    throw new RangeError(
+      `quakeShare: expected 0 or more, received ${task.quakeShare}; leave it out where no earthquake is reckoned with`,
     );
   const model = frameModel(task);
   const sized = sizeFrame(model);

@@ -13,6 +13,14 @@ const wallWord = (at: At): string => `${nameOf(at)} wall`;
 
 const loadOf = (at: At) => at.design.walls![at.index('wall')]!.loads[at.index('load')]!;
 
+/** The feet on which the frame stands in a case of an earthquake. */
+const feetWord = (at: At): string => `, ${at.index('k') === 0 ? 'stiff' : 'soft'} feet`;
+const shapeOf = (at: At) => ({
+  spans: spansOf(at),
+  deck: `${at.unit}/task/depthM`,
+  height: `${at.unit}/figures/${nameOf(at)}HeightM`,
+});
+
 /** A field of all that may strike a wall of the unit. */
 const strikesOf = (at: At, field: keyof Strike): string[] =>
   (at.design.task.strikes ?? []).flatMap((strikes, s) =>
@@ -106,6 +114,50 @@ export const wallFigures: readonly Descriptor[] = [
       }),
     }),
   ),
+  ...(
+    [
+      ['verticalKN', 'vertical load', 'kN'],
+      ['alongKN', 'thrust, towards the span', 'kN'],
+      ['momentKNm', 'moment, towards the span', 'kNm'],
+    ] as const
+  ).flatMap(([field, label, unit]) => [
+    described({
+      path: wallPath(`quake/:k/rest/${field}`),
+      label: (at) => `${label} that rests on the foundation in an earthquake, ${wallWord(at)}${feetWord(at)}`,
+      unit,
+      method: 'plane frame',
+      formula: 'own weight + superimposed load + restraint of the prestress + fill at rest, without traffic',
+      inputs: (at) => ({
+        ...shapeOf(at),
+        superimposed: `${at.unit}/task/deck/superimposedKNm`,
+        pressure: 'data/portal-frame/earth/restPressure',
+      }),
+    }),
+    described({
+      path: wallPath(`quake/:k/along/${field}`),
+      label: (at) => `${label} of an earthquake along the road, ${wallWord(at)}${feetWord(at)}`,
+      unit,
+      method: 'plane frame',
+      formula: 'a share of all permanent weight along the road, which the walls share by stiffness',
+      inputs: (at) => ({ ...shapeOf(at), force: `${at.unit}/figures/quakeKN` }),
+    }),
+  ]),
+  described({
+    path: wallPath('quake/:k/acrossKN'),
+    label: (at) => `force of an earthquake across the road, ${wallWord(at)}${feetWord(at)}`,
+    unit: 'kN',
+    method: 'product',
+    formula: 'share of the weight x (own weight of the wall and what rests on it)',
+    inputs: (at) => ({ ...shapeOf(at), share: `${at.unit}/task/quakeShare` }),
+  }),
+  described({
+    path: wallPath('quake/:k/acrossAboveM'),
+    label: (at) => `height of that force over the foundation, ${wallWord(at)}${feetWord(at)}`,
+    unit: 'm',
+    method: 'mean by weight',
+    formula: 'the deck at its top, the wall at the middle of its own weight',
+    inputs: (at) => ({ ...shapeOf(at), concrete: `${at.unit}/walls/${at.index('wall')}/concreteM3` }),
+  }),
   ...(
     [
       ['alongKN', 'force along the road', 'kN'],

@@ -1,0 +1,88 @@
+import { combinations, type Action, type Combination } from './combine.ts';
+import type { ChainEffects, FrameModel } from './frameModel.ts';
+import type { FrameTraffic } from './frameTraffic.ts';
+import { portalData } from './portalData.ts';
+
+type Parasitic = readonly ChainEffects[] | null;
+
+/**
+ * A wall struck, on stiff and on soft feet: permanent loads, fill with its least or at rest, prestress and the usual share of
+ * temperature with the force either way, all with a factor of 1, without traffic (EN 1990 6.4.3.3, from memory; the share of
+ * temperature that is there most of the time is that of the frequent one, table A2.1).
+ */
+function struckCombinations(model: FrameModel, traffic: FrameTraffic, parasitic: Parasitic): Combination[] {
+  const { earth, temperature, service, cracked } = portalData;
+  const warm = service.frequentTemperature * (model.prestressed ? 1 : cracked.share);
+  const perK = temperature.expansion1PerK / 1e-5;
+  return model.cases.flatMap((one, k) =>
+    one.strikes.flat().map((strike): Combination => ({
+      traffic: traffic.cases[k]!,
+      braking: one.braking,
+      shares: [],
+      actions: [
+        [[one.own, 1]],
+        [[one.superimposed, 1]],
+        [
+          [one.earth, earth.activePressure],
+          [one.earth, earth.restPressure],
+        ],
+        [
+          [one.longer, warm * perK * temperature.warmerK],
+          [one.longer, -warm * perK * temperature.colderK],
+        ],
+        [
+          [one.topWarmer, warm * temperature.topWarmerK],
+          [one.topWarmer, -warm * temperature.topCoolerK],
+        ],
+        [
+          [strike, 1],
+          [strike, -1],
+        ],
+        ...(parasitic ? [[[parasitic[k]!, 1]] satisfies Action] : []),
+      ],
+    })),
+  );
+}
+
+/**
+ * An earthquake along the road either way, on stiff and on soft feet: permanent loads, fill with its least or at rest and
+ * prestress, all with a factor of 1, without traffic and without imposed movements (EN 1990 6.4.3.4 and EN 1998-2 5.5, from
+ * memory). The fill neither presses harder for it nor holds the frame back.
+ */
+function quakeCombinations(model: FrameModel, traffic: FrameTraffic, parasitic: Parasitic): Combination[] {
+  const { quakeShare = 0 } = model.task;
+  if (!(quakeShare > 0)) return [];
+  const { activePressure, restPressure } = portalData.earth;
+  return model.cases.map((one, k) => ({
+    traffic: traffic.cases[k]!,
+    braking: one.braking,
+    shares: [],
+    actions: [
+      [[one.own, 1]],
+      [[one.superimposed, 1]],
+      [
+        [one.earth, activePressure],
+        [one.earth, restPressure],
+      ],
+      [
+        [one.weightAlong, quakeShare],
+        [one.weightAlong, -quakeShare],
+      ],
+      ...(parasitic ? [[[parasitic[k]!, 1]] satisfies Action] : []),
+    ],
+  }));
+}
+
+/**
+ * All that a frame has to be strong for: the ultimate limit state, its walls struck, an earthquake.
+ * @param parasitic restraint of the prestress on each kind of feet, or null
+ */
+export const strengthCombinations = (
+  model: FrameModel,
+  traffic: FrameTraffic,
+  parasitic: Parasitic,
+): Combination[] => [
+  ...combinations(model, traffic, 'ultimate', parasitic),
+  ...struckCombinations(model, traffic, parasitic),
+  ...quakeCombinations(model, traffic, parasitic),
+];
