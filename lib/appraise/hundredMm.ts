@@ -1,4 +1,4 @@
-import type { AppraisedOption, WorkedOption } from '../model/index.ts';
+import type { HundredMm, RoadProfile, WorkedOption } from '../model/index.ts';
 import { profileFor } from '../site/index.ts';
 import { approachLines } from '../takeoff/index.ts';
 import { depthAlong } from './workOption.ts';
@@ -7,26 +7,38 @@ import type { Workbench } from './workbench.ts';
 /** How much deeper the deck is made to ask what depth costs, m. */
 const DEEPER_M = 0.1;
 
+const ends = ['start', 'end'] as const;
+
+/** Face of the walls of the approaches and of the regrading behind fixed ends, m2. */
+const faceM2 = ({ approaches, regrading }: RoadProfile): number =>
+  ends.reduce((sum, end) => sum + approaches[end].wallM2 + (regrading?.[end]?.wallM2 ?? 0), 0);
+
 /**
- * What 100 mm more of construction depth does to the approaches of a worked option, at mean rates: fill, walls and money,
- * with the regrading behind fixed ends in the money. 0 where nothing decides the level, or both ends are fixed and nothing
- * is known of the road behind them; null where no road clears with it.
+ * What 100 mm more of construction depth does to the approaches of a worked option, the regrading of the road behind fixed
+ * ends among them: quantities, and money at mean rates. 0 where nothing decides the level, or both ends are fixed and
+ * nothing is known of the road behind them; null where no road clears with it.
  */
 export function hundredMm(
   { site, costOf }: Pick<Workbench, 'site' | 'costOf'>,
   option: WorkedOption,
-): AppraisedOption['hundredMm'] {
+): HundredMm | null {
   const { xM, depthM } = depthAlong(site, option.units, option.designs);
   const found = profileFor(site, { xM, depthM: depthM.map((depth) => depth + DEEPER_M) });
   if (!found.ok) return null;
-  const { profile } = found;
-  const more = (of: 'fillM3' | 'wallM2'): number =>
-    profile.approaches.start[of] -
-    option.profile.approaches.start[of] +
-    (profile.approaches.end[of] - option.profile.approaches.end[of]);
+  const before = approachLines(site, option.profile);
+  const after = approachLines(site, found.profile);
+  const more = (item: string): number => {
+    const [now = 0, then = 0] = [before, after].map((lines) =>
+      lines.reduce((sum, line) => (line.item === item ? sum + line.quantity : sum), 0),
+    );
+    return then - now;
+  };
   return {
-    fillM3: more('fillM3'),
-    wallM2: more('wallM2'),
-    amount: costOf(approachLines(site, profile)) - costOf(approachLines(site, option.profile)),
+    fillM3: more('fill'),
+    cutM3: more('excavation'),
+    wallM2: faceM2(found.profile) - faceM2(option.profile),
+    surfacingM2: more('surfacing'),
+    parapetM: more('parapet'),
+    amount: costOf(after) - costOf(before),
   };
 }

@@ -161,14 +161,26 @@ export interface AppraisedOption extends WorkedOption {
   readonly headroom: { readonly spareM: number; readonly reason: string; readonly chainageM: number } | null;
   /** Every water whose flood reaches the crossing; absent on options made before rivers were looked at. */
   readonly rivers?: readonly RiverCrossed[];
-  /** What 100 mm more of construction depth does to the approaches, at mean rates; null where no road clears with it. */
-  readonly hundredMm: { readonly fillM3: number; readonly wallM2: number; readonly amount: number } | null;
+  /** What 100 mm more of construction depth does to the approaches; null where no road clears with it. */
+  readonly hundredMm: HundredMm | null;
   readonly deckAreaM2: number;
   readonly cost: Spread;
   readonly quartiles: readonly [q1: number, q3: number];
   readonly pricePerM2: { readonly withApproaches: number; readonly withoutApproaches: number };
   readonly parts: readonly { readonly part: BillPart; readonly p50: number }[];
   readonly limitingCheck: { readonly id: string; readonly label: string; readonly utilisation: number };
+}
+
+/** What more of construction depth adds to the approaches and to the regrading behind fixed ends; less than 0 where it spares. */
+export interface HundredMm {
+  readonly fillM3: number;
+  readonly cutM3: number;
+  /** Face of retaining walls. */
+  readonly wallM2: number;
+  readonly surfacingM2: number;
+  readonly parapetM: number;
+  /** Money at mean rates. */
+  readonly amount: number;
 }
 
 /** Where the options stand on cost. */

@@ -54,19 +54,29 @@ function behindWords(option: AppraisedOption, end: 'start' | 'end'): HtmlChild {
 export function depthPrice(option: AppraisedOption, currency: string): HtmlChild {
   const { hundredMm } = option;
   if (hundredMm === null) return 'No road clears with a deck 100 mm deeper.';
-  const { amount, fillM3, wallM2 } = hundredMm;
-  const figure = (field: string, text: string): HTMLElement =>
+  const { amount } = hundredMm;
+  const figure = (field: keyof typeof hundredMm, text: string): HTMLElement =>
     workedFigure(ofOption(option, `hundredMm/${field}`), text);
+  const quantities = (
+    [
+      ['fillM3', 'm³', 'fill'],
+      ['cutM3', 'm³', 'cut'],
+      ['surfacingM2', 'm²', 'surfacing'],
+      ['wallM2', 'm²', 'wall'],
+    ] as const
+  ).filter(([field]) => Math.abs(hundredMm[field]) >= 0.5);
   if (Math.abs(amount) < 0.5) return 'Another 100 mm of depth costs nothing in the approaches.';
   return [
     amount > 0
       ? 'Another 100 mm of depth costs the approaches '
       : 'Another 100 mm of depth is taken up by the crest, whose steeper ends spare the approaches ',
     figure('amount', fixed(Math.round(Math.abs(amount) / 10) * 10, 0)),
-    ` ${currency}: `,
-    figure('fillM3', fixed(Math.abs(fillM3), 0)),
-    ' m³ of fill',
-    Math.abs(wallM2) > 0.5 && [' and ', figure('wallM2', fixed(Math.abs(wallM2), 0)), ' m² of wall'],
+    ` ${currency}`,
+    quantities.map(([field, unit, what], i) => [
+      i === 0 ? ': ' : i < quantities.length - 1 ? ', ' : ' and ',
+      figure(field, fixed(Math.abs(hundredMm[field]), 0)),
+      ` ${unit} ${hundredMm[field] > 0 ? 'more' : 'less'} ${what}`,
+    ]),
     '.',
   ];
 }

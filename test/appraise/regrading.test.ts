@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { AppraisedOption, MeasuredLine, Road, Study } from '../../lib/index.ts';
+import { meanRates, ratesFor } from '../../lib/price/index.ts';
 import { answerTo } from './answerTo.ts';
 import { lowFerry, mirrored } from './studies.ts';
 
@@ -86,6 +87,33 @@ describe('appraise with the gradient of the road behind a fixed end', () => {
     expect(options.length).toBeGreaterThan(0);
     for (const option of options)
       expect(ruled(option, 'road-regrading')).toMatchObject({ effect: 'to confirm' });
+  });
+
+  it('hundredMm has the regrading in its quantities, and they come to its money at mean rates', () => {
+    const study = held({ endGradient: 0.02, endApproachM: 600 });
+    const { options, site } = answerTo(study);
+    const rates = meanRates(ratesFor(study.books));
+    for (const { hundredMm } of options) {
+      const { fillM3, cutM3, wallM2, surfacingM2, parapetM, amount } = hundredMm!;
+      expect(wallM2).toBe(0);
+      expect(parapetM).toBeCloseTo((2 * surfacingM2) / site.deck.widthM, 6);
+      const byHand =
+        fillM3 * rates['fill']! +
+        cutM3 * rates['excavation']! +
+        surfacingM2 * rates['surfacing']! +
+        parapetM * rates['parapet']!;
+      expect(byHand).toBeCloseTo(amount, 3);
+    }
+    // Where the end falls more steeply for it, the sag behind grows: dug deeper, surfaced over a longer stretch.
+    const steeper = options.filter(({ hundredMm }) => hundredMm!.amount > 0);
+    expect(steeper.length).toBeGreaterThan(0);
+    for (const { hundredMm, profile } of steeper) {
+      expect(profile.regrading!.end!.kind).toBe('sag');
+      expect(hundredMm!.cutM3).toBeGreaterThan(0);
+      expect(hundredMm!.surfacingM2).toBeGreaterThan(0);
+    }
+    for (const { hundredMm } of answerTo(held({})).options)
+      expect(hundredMm).toMatchObject({ cutM3: 0, surfacingM2: 0, parapetM: 0 });
   });
 
   it('appraise(mirrored) regrades as much behind the other end', () => {

@@ -844,7 +844,7 @@ function option(row: Row): AppraisedOption {
       stayCableKg: 0,
       mainCableKg: 0,
     },
-    hundredMm: { fillM3: 90, wallM2: 0, amount: 1530 },
+    hundredMm: { fillM3: 90, cutM3: 0, wallM2: 0, surfacingM2: 0, parapetM: 0, amount: 1530 },
     headroom: { spareM: 0.5, reason: '5.90 m over rail', chainageM: 1276.6 },
     deckAreaM2: area,
     cost: { p10, p50, p90 },
