@@ -21,7 +21,7 @@ export interface FoundationTask extends FootTask {
   readonly name: string;
   /** Index of the support along the crossing, carried into the lines; absent in a trial. */
   readonly support?: number;
-  /** Level to which the lines of the shaft reach, m: what lies between it and the foundation is measured here. */
+  /** Level to which the lines of the shaft reach, m: what lies between it and the foundation is measured here, or taken off. */
   readonly shaftFootM: number;
   readonly shaftAreaM2: number;
   readonly shaftBarsKgM3: number;

@@ -197,7 +197,8 @@ export const footLineFigures: readonly Descriptor[] = [
     label,
     unit: 'm3',
     method: 'volume',
-    formula: 'section of the shaft x (foot of its own lines - top of the foundation)',
+    formula:
+      'section of the shaft x (foot of its own lines - top of the foundation), taken off where the foundation reaches higher',
     inputs: (at) => ({
       foot: `${at.foot}/footM`,
       top: `${footPath(at)}/footing/topLevelM`,
@@ -213,7 +214,7 @@ export const footLineFigures: readonly Descriptor[] = [
       const hollow =
         at.support.kind !== 'abutment' && at.support.kind !== 'pylon' && v.above - v.foot > v.hollow;
       const inside = hollow ? Math.max(0, v.length - 2 * v.wall) * Math.max(0, width - 2 * v.wall) : 0;
-      return (v.length * width - inside) * v.columns * Math.max(0, v.foot - v.top);
+      return (v.length * width - inside) * v.columns * (v.foot - v.top);
     },
   }),
 ];

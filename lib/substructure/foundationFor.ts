@@ -123,10 +123,13 @@ function blockLines(task: FoundationTask, base: LineBase, size: FootingSize, wor
   ];
 }
 
-/** Shaft between the level to which the support's own lines reach and the top of this foundation. */
+/**
+ * Shaft between the level to which the support's own lines reach and the top of this foundation; less than none where the
+ * foundation reaches up over that level, so that what stands on it is counted from its top.
+ */
 function shaftBelow(task: FoundationTask, base: LineBase, topLevelM: number): MeasuredLine[] {
-  const volume = Math.max(0, task.shaftFootM - topLevelM) * task.shaftAreaM2;
-  if (!(volume > 0)) return [];
+  const volume = (task.shaftFootM - topLevelM) * task.shaftAreaM2;
+  if (volume === 0) return [];
   const what = `${task.name} shaft below ground`;
   return [
     {
@@ -134,7 +137,7 @@ function shaftBelow(task: FoundationTask, base: LineBase, topLevelM: number): Me
       item: task.shaftItem,
       quantity: volume,
       what,
-      how: `${task.shaftAreaM2.toFixed(2)} m2 down to the foundation`,
+      how: `${task.shaftAreaM2.toFixed(2)} m2 ${volume > 0 ? 'down to' : 'off for'} the foundation`,
     },
     {
       ...base,

@@ -7,6 +7,7 @@ import type { Frame } from './frame.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num, pathOf } from './piece.ts';
+import { likeliest } from './substructure.ts';
 
 type XY = readonly [number, number];
 
@@ -71,6 +72,20 @@ function shapePiece(
   });
 }
 
+/** A wall in one with the deck stands on its footing, which may reach higher than the wall was sized down to. */
+function onFooting(site: Site, option: AppraisedOption, { fromM }: PlacedUnit, shape: Shape): readonly XY[] {
+  if (!shape.part.endsWith(' wall')) return shape.points;
+  const xs = shape.points.map(([x]) => fromM + x);
+  const under = option.supports.find(
+    ({ chainageM }) => chainageM >= Math.min(...xs) && chainageM <= Math.max(...xs),
+  );
+  const footing = under && likeliest(under)?.footing;
+  if (!footing) return shape.points;
+  return shape.points.map(
+    ([x, z]) => [x, Math.max(z, footing.topLevelM - slabLevel(site, option, fromM + x))] as const,
+  );
+}
+
 function unitPiece(
   site: Site,
   option: AppraisedOption,
@@ -109,7 +124,7 @@ function unitPiece(
     shapes.map((shape) =>
       shapePiece(
         shape,
-        laid(shape, shape.points, shape.kind === 'polygon'),
+        laid(shape, onFooting(site, option, placed, shape), shape.kind === 'polygon'),
         (shape.holes ?? []).map((hole) => laid(shape, hole, true)),
         placed,
         ink,

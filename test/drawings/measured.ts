@@ -51,6 +51,19 @@ const crossingOf = ({ appraisal, study }: Crossed, option: AppraisedOption): Nod
   file(crossing({ site: appraisal.site, option, obstacles: study.brief.obstacles, widthPx: 1224 }));
 
 describe('elevation(input), measured', { timeout: 120_000 }, () => {
+  it('elevation(frame) has every wall end on its footing, the one that reaches up over the foot of its wall too', () => {
+    const crossed = example('stonebeck-lane');
+    const frame = crossed.appraisal.options.find(({ form }) => form === 'portal-frame')!;
+    const svg = elevationOf(crossed, frame);
+    const tops = having(svg, 'class', 'substructure')
+      .flatMap((one) => parts(one, 'footing'))
+      .map((one) => boxOf(one).top);
+    const feet = ['first wall', 'middle wall', 'last wall'].map((name) => boxOf(parts(svg, name)[0]!).bottom);
+    expect(tops).toHaveLength(3);
+    feet.forEach((foot, w) => expect(foot).toBeLessThanOrEqual(tops[w]! + READING_PX));
+    expect(Math.min(...feet.map((foot, w) => Math.abs(foot - tops[w]!)))).toBeLessThanOrEqual(READING_PX);
+  });
+
   it.each(exampleNames)('gives back spans, depths, road and founding of every option of %s', (name) => {
     const crossed = example(name);
     expect(crossed.appraisal.options.length).toBeGreaterThan(0);

@@ -35,7 +35,7 @@ it('standSupports(frame) has two walls in one with the deck: no bearings, joints
   }
 });
 
-it('measure(frame) counts each wall once: in the design down to its foot, in the foundation below it', () => {
+it('measure(frame) counts each wall once: in the design down to its foot, in the foundation below it or off what reaches higher', () => {
   const design = frame();
   const supports = stood(design);
   const lines = measure(site, [design], supports, profile);
@@ -47,7 +47,7 @@ it('measure(frame) counts each wall once: in the design down to its foot, in the
   const slab = 10 - constructionDepth(site.deck, 0);
   for (const { foundations } of supports)
     for (const { lines: below, footing } of foundations) {
-      const gap = Math.max(0, slab - design.walls![0]!.heightM - footing.topLevelM);
+      const gap = slab - design.walls![0]!.heightM - footing.topLevelM;
       expect(sum(below, 'abutment-concrete')).toBeCloseTo(gap * design.walls![0]!.footM * 12, 9);
     }
 });
@@ -74,6 +74,24 @@ it('standSupports(frame) sizes footings and piles for thrust and moment on every
   expect(area(thrust)).toBeGreaterThan(area(plain));
   expect(piles(thrust)).toBeGreaterThan(piles(plain));
   expect(area(turned)).toBeGreaterThan(area(plain));
+});
+
+it('measure(frame) takes off what a deep footing has of the wall that stands on it, concrete and bars', () => {
+  // On gravel near the surface the underside is 1.5 m down and the wall ends 0.5 m down: deeper than a metre is too high.
+  const design = portalFrame.size({ ...frame().task, quakeShare: 0.6 });
+  const near = site.groundStretches.map((stretch) => ({
+    ...stretch,
+    classes: stretch.classes.map((one) => ({ ...one, bearingLevelM: 10 })),
+  }));
+  const unit = { ...unitOn([0, 24]), form: 'portal-frame' } as const;
+  const [support] = standSupports({ ...site, groundStretches: near }, [unit], [design], profile);
+  const { footing, lines } = support!.foundations[0]!;
+  const over = footing.topLevelM - (10 - constructionDepth(site.deck, 0) - design.walls![0]!.heightM);
+  expect(over).toBeGreaterThan(0.05);
+  const [wall] = design.walls!;
+  expect(sum(lines, 'abutment-concrete')).toBeCloseTo(-over * wall!.footM * 12, 9);
+  const off = lines.find(({ item, what }) => item === 'reinforcement' && what.includes('shaft'))!;
+  expect(off.quantity).toBeCloseTo((-over * wall!.footM * 12 * wall!.reinforcementKg) / wall!.concreteM3, 6);
 });
 
 it('standSupports(frame) slides nowhere: thrust within 0.4 of the vertical load with the fill on the heel', () => {
