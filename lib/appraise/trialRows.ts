@@ -13,6 +13,7 @@ import { leastCostDepth } from './leastCostDepth.ts';
 import type { TrialRow } from './memory.ts';
 import type { Sizer } from './sizer.ts';
 import { tautSide } from './tautSide.ts';
+import { trialSpans } from './trialSpans.ts';
 import { finish, type Work } from './work.ts';
 
 /** Governing spans at which each form is really sized; in between cost grows with a power of the span. */
@@ -39,6 +40,9 @@ const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.
 const isFrame = (pattern: Pattern): boolean =>
   pattern.kind === 'continuous' && (pattern.mostSpans ?? Infinity) <= 2;
 
+/** The longer of two spans of a frame over a crossing where the shorter is the least of it that rules leave open, m. */
+const longestOfTwo = (form: FormId, lengthM: number): number => lengthM / (1 + leastOfTwoSpans(form));
+
 /**
  * A unit of ordinary proportions for one governing span on a crossing: its spans, and its pylons where the form has them.
  * Of a frame the longer of two spans reaches no farther than where the shorter is the least of it: a longer one stands alone.
@@ -52,8 +56,7 @@ function trialUnit(
   const pattern = formModule(form).pattern;
   if (pattern.kind === 'simple-main') return { spansM: [spanM] };
   if (pattern.kind === 'continuous' || pattern.kind === 'flanked') {
-    if (isFrame(pattern))
-      return { spansM: spanM * (1 + leastOfTwoSpans(form)) <= lengthM ? [spanM, spanM] : [spanM] };
+    if (isFrame(pattern)) return { spansM: spanM <= longestOfTwo(form, lengthM) ? [spanM, spanM] : [spanM] };
     return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
   }
   const [least, most] =
@@ -96,12 +99,11 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     throw new RangeError(`cost table: ${form} has no span that fits a crossing of ${site.lengthM} m`);
   const [, most] = open;
   const least = Math.min(most, Math.max(open[0], LEAST_SPAN_M));
-  const spansM = Array.from(
-    { length: TABLE_SPANS },
-    (_, i) => least * Math.pow(most / least, i / (TABLE_SPANS - 1)),
-  );
-  const { pattern } = formModule(form);
+  const { pattern, leapsAtM = [] } = formModule(form);
   const { kind } = pattern;
+  // Where two spans give way to one the cost leaps as well.
+  const leapsM = isFrame(pattern) ? [...leapsAtM, longestOfTwo(form, site.lengthM)] : leapsAtM;
+  const spansM = trialSpans([least, most], leapsM, TABLE_SPANS);
   const hung = kind === 'pylon';
   const base = {
     form,

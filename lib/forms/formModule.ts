@@ -25,6 +25,8 @@ export interface FormModule {
   readonly methods: readonly [MethodId, ...MethodId[]];
   /** Longest span that `size` can lay out, m, where that is less than the published band of the form. */
   readonly mostSpanM?: number;
+  /** Spans up to which a unit is made one way and another beyond, so that its cost leaps there, m. */
+  readonly leapsAtM?: readonly number[];
   /** Spans of a continuous pattern that are laid as simple beams: joined for what comes later, or never; joined from the start unless given. */
   readonly joined?: 'after-placing' | 'never';
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */

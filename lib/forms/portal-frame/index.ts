@@ -23,6 +23,7 @@ export const portalFrame: FormModule = {
   pattern: { kind: 'continuous', mostSpans: 2 },
   methods: ['falsework'],
   wallsInOne: true,
+  leapsAtM: [portalData.reinforced.mostSpanM],
   size,
 };
 
