@@ -155,6 +155,22 @@ const crestLabel = 'radius of the crest between the abutments';
 const crest: readonly Descriptor[] = [
   described({
     path: crestPath,
+    when: (at) => at.option.profile.easedFor !== undefined,
+    label: crestLabel,
+    unit: 'm',
+    method: 'cheapest of the lowest road and those that spare a curve',
+    formula: (at) =>
+      `length / (2 x |gradient of the existing road behind the ${at.option.profile.easedFor!} - mean gradient|), at least the least radius: sharper than the clearances ask for, as the regrading it spares costs more than the height`,
+    inputs: (at) => ({
+      held: `site/road/${at.option.profile.easedFor!}Gradient`,
+      mean: `${at.root}/profile/gradient`,
+      length: 'site/lengthM',
+      least: 'site/roadCurves/crestRadiusM',
+    }),
+    compute: ({ held, mean, length, least }) => Math.max(least, length / (2 * Math.abs(held - mean))),
+  }),
+  described({
+    path: crestPath,
     when: (at) => riseOf(at, 'start') + riseOf(at, 'end') === 0 && oneLine(at) && touchOn(at) !== null,
     label: crestLabel,
     unit: 'm',

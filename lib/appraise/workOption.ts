@@ -10,7 +10,14 @@ import type {
   WorkedOption,
 } from '../model/index.ts';
 import { planProgramme } from '../programme/index.ts';
-import { constructionDepth, groundAt, headroomSpare, roadLevelAt, type DepthAlong } from '../site/index.ts';
+import {
+  constructionDepth,
+  easedProfile,
+  groundAt,
+  headroomSpare,
+  roadLevelAt,
+  type DepthAlong,
+} from '../site/index.ts';
 import {
   foundationsCost,
   placeText,
@@ -109,21 +116,46 @@ function standing(
 /** Depths that differ by less are one, m. */
 const SAME_DEPTH_M = 1e-9;
 
-/** An option at given depths of its units, m: designs, road, supports, quantities and months. */
+/** What an option comes to at mean rates and the odds of the ground, money. */
+const moneyOf = ({ costOf }: Workbench, { supports, lines }: AtDepth): number =>
+  costOf(lines) + supports.reduce((sum, support) => sum + foundationsCost(support, costOf), 0);
+
+/**
+ * An option at given depths of its units, m, on the cheapest of its roads: the lowest that clears, and where a fixed end has
+ * an existing road behind it of known gradient, the one with a crest as sharp as spares the curve there.
+ */
 function workAt(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
+  const lowest = workOn(bench, option, depthsM);
+  return (['start', 'end'] as const)
+    .filter((end) => easedProfile(bench.site, lowest.profile, end) !== null)
+    .map((end) => workOn(bench, option, depthsM, end))
+    .reduce((best, eased) => (moneyOf(bench, eased) < moneyOf(bench, best) ? eased : best), lowest);
+}
+
+/** An option at given depths of its units, m: designs, road, supports, quantities and months. */
+function workOn(
+  bench: Workbench,
+  option: Option,
+  depthsM: readonly number[],
+  easedFor?: RoadProfile['easedFor'],
+): AtDepth {
   const { site, size } = bench;
+  const roadOver = (depth: DepthAlong): RoadProfile => {
+    const lowest = profileOrNearest(site, depth);
+    return (easedFor && easedProfile(site, lowest, easedFor)) ?? lowest;
+  };
   const { units } = option;
   // The road follows the depths, and the designs see the road only through the height under them.
   const guess: DepthAlong = {
     xM: units.flatMap((unit) => [unit.supportsM[0]!, unit.supportsM.at(-1)!]),
     depthM: depthsM.flatMap((d) => [constructionDepth(site.deck, d), constructionDepth(site.deck, d)]),
   };
-  const before = profileOrNearest(site, guess);
+  const before = roadOver(guess);
   const designs = units.map((unit, k) => size(taskOf(bench, option, unit, depthsM[k]!, before)));
   const isAsDeep = designs.every(({ depthAlong: { depthM } }, k) =>
     depthM.every((d) => Math.abs(d - depthsM[k]!) < SAME_DEPTH_M),
   );
-  const profile = isAsDeep ? before : profileOrNearest(site, depthAlong(site, units, designs));
+  const profile = isAsDeep ? before : roadOver(depthAlong(site, units, designs));
   const supports = standing(bench, units, designs, profile);
   const programme = planProgramme(site, designs, supports);
   const lines = [...measure(site, designs, supports, profile), ...programme.lines];
@@ -152,13 +184,13 @@ export function depthsOf(bench: Workbench, option: Option, depthM: number): numb
 
 /** What an option made one way comes to at one depth of its main unit, m. */
 export function trialAt(bench: Workbench, option: Option, depthM: number): DepthTrial {
-  const { site, costOf } = bench;
-  const { designs, profile, supports, lines } = atDepths(bench, option, depthsOf(bench, option, depthM));
-  const foundations = supports.reduce((sum, support) => sum + foundationsCost(support, costOf), 0);
+  const { site } = bench;
+  const found = atDepths(bench, option, depthsOf(bench, option, depthM));
+  const { designs, profile } = found;
   const spare = headroomSpare(site, profile, depthAlong(site, option.units, designs))?.spareM ?? 0;
   const utilisation = Math.max(...designs.map((design) => design.limitingCheck.utilisation));
   return {
-    cost: costOf(lines) + foundations,
+    cost: moneyOf(bench, found),
     // A depth that fouls a clearance fits no better than one that is too weak.
     utilisation: spare < -1e-6 ? Math.max(utilisation, 1) - spare : utilisation,
   };

@@ -170,4 +170,6 @@ export interface RoadProfile {
   readonly approaches: { readonly start: Approach; readonly end: Approach };
   /** Behind each fixed end where the gradient of the existing road is known; absent where there is none such. */
   readonly regrading?: { readonly start?: Regrading; readonly end?: Regrading };
+  /** Fixed end whose curve behind is spared by a crest sharper than the clearances ask for; absent where the road is the lowest. */
+  readonly easedFor?: 'start' | 'end';
 }

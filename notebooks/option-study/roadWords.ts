@@ -6,13 +6,15 @@ import { workedFigure } from '../page/index.ts';
 
 /** How the road runs over the bridge, how far it reaches behind it, and how it goes on behind an end that is fixed. */
 export function roadWords({ fixedEnd }: Site['road'], option: AppraisedOption): HtmlChild {
-  const { crestRadiusM, steepestGradient, approaches } = option.profile;
+  const { crestRadiusM, steepestGradient, approaches, easedFor } = option.profile;
   const figure = (field: string, text: string): HTMLElement =>
     workedFigure(ofOption(option, `profile/${field}`), text);
   return [
     crestRadiusM === null
       ? 'The road runs straight between the abutments'
       : ['The road runs over a crest of ', figure('crestRadiusM', radiusText(crestRadiusM)), ' m radius'],
+    easedFor !== undefined &&
+      `, sharper than what it clears asks for, which spares the curve behind the ${easedFor}`,
     ', nowhere steeper than ',
     figure('steepestGradient', fixed(100 * steepestGradient, 1)),
     ' % there; its approaches take ',

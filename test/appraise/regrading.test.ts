@@ -1,6 +1,15 @@
 import { describe, expect, it } from 'vitest';
-import type { AppraisedOption, MeasuredLine, Road, Study } from '../../lib/index.ts';
+import {
+  workbench,
+  type AppraisedOption,
+  type MeasuredLine,
+  type Road,
+  type RoadProfile,
+  type Study,
+} from '../../lib/index.ts';
 import { meanRates, ratesFor } from '../../lib/price/index.ts';
+import { constructionDepth, profileFor } from '../../lib/site/index.ts';
+import { approachLines } from '../../lib/takeoff/index.ts';
 import { answerTo } from './answerTo.ts';
 import { lowFerry, mirrored } from './studies.ts';
 
@@ -114,6 +123,35 @@ describe('appraise with the gradient of the road behind a fixed end', () => {
     }
     for (const { hundredMm } of answerTo(held({})).options)
       expect(hundredMm).toMatchObject({ cutM3: 0, surfacingM2: 0, parapetM: 0 });
+  });
+
+  it('appraise() takes the sharper crest that spares the curve behind where that is cheaper in all, and only there', () => {
+    // The road falls away at 5 % behind the end and rises at 3 % before the start: both curves go with a crest over the bridge.
+    const steep = held({
+      fixedEnd: 'both',
+      startGradient: 0.03,
+      endGradient: -0.05,
+      startApproachM: 600,
+      endApproachM: 600,
+    });
+    const bench = workbench(steep);
+    for (const option of answerTo(steep).options) {
+      expect(option.profile.easedFor).toBe('start');
+      expect(option.profile.regrading!.start!.gradientChange).toBeCloseTo(0, 9);
+      expect(option.profile.regrading!.end!.gradientChange).toBeLessThan(0.001);
+      // Higher than it need be, and the approaches spare more than 100 mm of depth would.
+      expect(option.headroom!.spareM).toBeGreaterThan(0.1);
+      const lowest = profileFor(bench.site, {
+        xM: [bench.site.startM, bench.site.endM],
+        depthM: [0, 0].map(() => constructionDepth(bench.site.deck, option.depthM.support)),
+      });
+      if (!lowest.ok) throw new Error('expected a road');
+      const paid = (profile: RoadProfile): number => bench.costOf(approachLines(bench.site, profile));
+      expect(paid(option.profile)).toBeLessThan(paid(lowest.profile) - 10_000);
+    }
+    // Where the existing road goes up behind the end no crest spares anything.
+    for (const { profile } of answerTo(held({ endGradient: 0.02, endApproachM: 600 })).options)
+      expect(profile.easedFor).toBeUndefined();
   });
 
   it('appraise(mirrored) regrades as much behind the other end', () => {

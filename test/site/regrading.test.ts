@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { Brief, Regrading, Road, RoadPiece } from '../../lib/model/index.ts';
-import { profileFor, proposedProfile, roadLevelAt, survey } from '../../lib/site/index.ts';
+import { easedProfile, profileFor, proposedProfile, roadLevelAt, survey } from '../../lib/site/index.ts';
 import { pieceGradientAt, pieceLevelAt } from '../../lib/site/roadLevelAt.ts';
 import { plainBrief } from './demoBrief.ts';
 
@@ -196,5 +196,64 @@ describe('the road behind a fixed end', () => {
       }),
       { seed, numRuns: 200 },
     );
+  });
+});
+
+describe('a crest that spares the curve behind a fixed end', () => {
+  const eased = (road: Partial<Road>) => {
+    const site = survey(withRoad({ ...falling, ...road }));
+    const lowest = proposedProfile(site);
+    return { site, lowest, profile: easedProfile(site, lowest, 'end') };
+  };
+
+  it('has half its length over the gradient for a radius and leads into the existing road without a curve', () => {
+    // By hand: level ends 100 m apart and 2 % to fall into at one of them: 100 / (2 x 0.02) = 2500 m, 0.5 m over the middle.
+    const { profile, lowest } = eased({ endGradient: -0.02 });
+    expect(profile).toMatchObject({ easedFor: 'end', startLevelM: 6, endLevelM: 6 });
+    expect(profile!.crestRadiusM).toBeCloseTo(2500, 9);
+    expect(roadLevelAt(profile!, 50)).toBeCloseTo(6.5, 9);
+    expect(profile!.regrading!.end!.gradientChange).toBeCloseTo(0, 12);
+    expect(profile!.regrading!.end!.lengthM).toBeCloseTo(0, 9);
+    expect(lowest.regrading!.end!.lengthM).toBeGreaterThan(90);
+    for (let x = 0; x <= 100; x += 10)
+      expect(roadLevelAt(profile!, x)).toBeGreaterThanOrEqual(roadLevelAt(lowest, x));
+  });
+
+  it('is no sharper than is allowed: then the curve is spared as far as that goes', () => {
+    const { profile, lowest } = eased({ endGradient: -0.05 });
+    expect(profile!.crestRadiusM).toBe(2000);
+    // 100 / (2 x 2000) = 0.025 of 0.05: half of the way.
+    expect(profile!.regrading!.end!.gradientChange).toBeCloseTo(0.025, 12);
+    expect(profile!.regrading!.end!.lengthM / lowest.regrading!.end!.lengthM).toBeCloseTo(0.5, 9);
+  });
+
+  it('is not there where the road behind rises, is not known, or its end is free', () => {
+    for (const road of [
+      { endGradient: 0.02 },
+      { endGradient: 0 },
+      { endGradient: 'unknown' },
+      { fixedEnd: 'none' },
+    ] as const)
+      expect(eased(road).profile).toBeNull();
+  });
+
+  it('clears what the lowest road clears, between the same ends', () => {
+    const site = survey(withRoad({ ...falling, endGradient: -0.03, mayRiseM: 3 }));
+    let spared = 0;
+    fc.assert(
+      fc.property(fc.double({ min: 0.3, max: 3, noNaN: true }), (depthM) => {
+        const found = profileFor(site, depthM);
+        if (!found.ok) return;
+        const profile = easedProfile(site, found.profile, 'end');
+        if (profile === null) return;
+        spared += 1;
+        expect(profile.startLevelM).toBe(found.profile.startLevelM);
+        expect(profile.endLevelM).toBe(found.profile.endLevelM);
+        for (let x = 0; x <= 100; x += 5)
+          expect(roadLevelAt(profile, x)).toBeGreaterThanOrEqual(roadLevelAt(found.profile, x) - 1e-9);
+      }),
+      { seed: 7, numRuns: 60 },
+    );
+    expect(spared).toBeGreaterThan(10);
   });
 });
