@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { frameModel } from '../../../lib/forms/portal-frame/frameModel.ts';
 import { portalFrame } from '../../../lib/forms/portal-frame/index.ts';
+import { portalData } from '../../../lib/forms/portal-frame/portalData.ts';
 import type { Design } from '../../../lib/model/index.ts';
 import { task, useOf } from './trialFrame.ts';
 
@@ -44,6 +45,12 @@ describe('weight turned along the road', () => {
     expect(end!.verticalKN).toBeGreaterThan((deckKN * (wall!.heightM - shape.kneeM)) / 20);
     expect(end!.verticalKN).toBeLessThan((deckKN * wall!.heightM + 2 * wallKN * height) / 20);
   });
+});
+
+it('has fill at rest press as active fill shaken by a fifth of gravity does, by Seed and Whitman', () => {
+  const { activePressure, restPressure } = portalData.earth;
+  expect(activePressure + 0.75 * 0.2).toBeLessThan(restPressure);
+  expect(activePressure + 0.75 * 0.22).toBeGreaterThan(restPressure);
 });
 
 describe('portalFrame.size() in an earthquake', () => {
