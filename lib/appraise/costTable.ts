@@ -14,6 +14,13 @@ function between(grid: readonly number[], value: number): readonly [index: numbe
   return [i, high > low ? Math.min(1, Math.max(0, (value - low) / (high - low))) : 0];
 }
 
+const [SHORTER, WHOLE] = SHARES;
+
+/** What a metre of deck costs in a unit of one row, from its shorter spans to those as long as the governing one. */
+function deckCost({ perM }: TrialRow, towardsWhole: number): number {
+  return perM[0]! + towardsWhole * (perM[1]! - perM[0]!);
+}
+
 /** A span among the trial spans of a form, with what was last read there from the rows on both sides. */
 interface Place {
   readonly spanM: number;
@@ -75,11 +82,9 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
       places.set(form, place);
       return place;
     };
-    const read = (form: FormId, spanM: number, value: (row: TrialRow) => number): number => {
-      const place = placeOf(form, spanM);
-      const { share, octaves, row, i } = place;
-      const low = share < 1 ? value(row(i)) : 0;
-      const high = share > 0 ? value(row(i + 1)) : 0;
+    /** Between the rows on both sides of a place. */
+    const across = (place: Place, low: number, high: number): number => {
+      const { share, octaves } = place;
       if (!(share > 0 && share < 1 && low > 0 && high > 0)) return (1 - share) * low + share * high;
       if (low !== place.low || high !== place.high) {
         place.low = low;
@@ -88,6 +93,11 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
       }
       return place.value;
     };
+    const read = (form: FormId, spanM: number, value: (row: TrialRow) => number): number => {
+      const place = placeOf(form, spanM);
+      const { share, row, i } = place;
+      return across(place, share < 1 ? value(row(i)) : 0, share > 0 ? value(row(i + 1)) : 0);
+    };
     let asking: { form?: FormId; mean: number; onLoads: ReturnType<typeof between> } = {
       mean: NaN,
       onLoads: [0, 0],
@@ -95,8 +105,12 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
     return {
       deckPerM(form, spanM, governingM) {
         const governing = Math.max(governingM, spanM);
-        const [k, within] = between(SHARES, governing > 0 ? spanM / governing : 1);
-        return read(form, governing, ({ perM }) => perM[k]! + within * (perM[k + 1]! - perM[k]!));
+        const of = governing > 0 ? spanM / governing : 1;
+        const towardsWhole = Math.min(1, Math.max(0, (of - SHORTER) / (WHOLE - SHORTER)));
+        const place = placeOf(form, governing);
+        const { share, row, i } = place;
+        const low = share < 1 ? deckCost(row(i), towardsWhole) : 0;
+        return across(place, low, share > 0 ? deckCost(row(i + 1), towardsWhole) : 0);
       },
       endWorksAs: (form, governingM) => read(form, governingM, (row) => row.endWorksAs),
       aloneWorksAs: (form, governingM) => read(form, governingM, (row) => row.aloneWorksAs),

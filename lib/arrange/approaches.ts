@@ -14,11 +14,19 @@ export interface Approach {
 /** Different numbers of spans kept for each end of an approach. */
 const KEPT = 3;
 
+/** Cost from which a list takes no more. */
+const dearest = (list: readonly Approach[]): number => list[KEPT - 1]?.cost ?? Infinity;
+
+const isBefore = (a: Approach, b: Approach): boolean =>
+  a.cost < b.cost || (a.cost === b.cost && a.spans < b.spans);
+
+/** Takes an approach into a list in place of one with as many spans, or of the dearest of too many. */
 function insert(list: Approach[], approach: Approach): void {
   const same = list.findIndex(({ spans }) => spans === approach.spans);
   if (same >= 0) list.splice(same, 1);
-  list.push(approach);
-  list.sort((a, b) => a.cost - b.cost || a.spans - b.spans);
+  let at = list.length;
+  while (at > 0 && isBefore(approach, list[at - 1]!)) at -= 1;
+  list.splice(at, 0, approach);
   list.length = Math.min(list.length, KEPT);
 }
 
@@ -39,12 +47,21 @@ export function approachesTo(
   if (firstEnd === 0) lists[0]!.push({ cost: 0, spans: 0, at: () => [] });
   const first = Math.max(firstEnd, 1);
   if (lastEnd < first) return lists;
-  const task = { form, X, firstEnd: first, lastEnd, limits, supports, endIsPier: true };
-  searchUnit(task, table, (end, spans, governingM, cost, at) => {
+  const task = {
+    form,
+    X,
+    firstEnd: first,
+    lastEnd,
+    limits,
+    supports,
+    endIsPier: true,
+    wantedUpTo: (end: number) => dearest(lists[end]!),
+  };
+  searchUnit(task, table, (end, spans, governingM, cost, trace) => {
     const list = lists[end]!;
-    const same = list.find((known) => known.spans === spans);
-    if (same !== undefined ? cost >= same.cost : list.length === KEPT && cost >= list[KEPT - 1]!.cost)
-      return true;
+    if (cost >= dearest(list)) return true;
+    for (const known of list) if (known.spans === spans && cost >= known.cost) return true;
+    const at = trace();
     // The search keeps every window but the least longest span, which an inner span may reach by itself.
     const reaches = spans > 2 && limits.interiorLeast * governingM >= limits.minSpanM;
     if (reaches || spanFault(spansAlong(X, at()), limits) === null) insert(list, { cost, spans, at });

@@ -13,19 +13,25 @@ export interface PlacedUnit {
 
 /** One arrangement that can be built, as the search finds it. */
 export interface Candidate {
-  readonly placed: readonly PlacedUnit[];
+  /** As in `kindOf`. */
+  readonly kind: number;
   /** Cost as the search adds it up: support costs split between spans, governing spans on their grid. */
   readonly estimate: number;
+  /** Put together when asked for: most candidates are only counted. */
+  readonly placed: () => readonly PlacedUnit[];
 }
 
-/** The same with its chainages and its cost on the table. */
+/** An arrangement with its chainages and its cost on the table. */
 export interface Worked {
   readonly placed: readonly PlacedUnit[];
   readonly units: readonly Unit[];
   readonly cost: number;
 }
 
-/** Arrangements are different when they differ in this: number of supports and of pylons. */
+/** Arrangements are different when they differ in this: number of supports, abutments included, and of pylons. */
+export const kindFor = (supports: number, pylons: number): number => supports * 4 + pylons;
+
+/** The kind of a row of placed units. */
 export function kindOf(placed: readonly PlacedUnit[]): number {
   let supports = 1;
   let pylons = 0;
@@ -33,7 +39,7 @@ export function kindOf(placed: readonly PlacedUnit[]): number {
     supports += unit.at.length - 1;
     pylons += unit.pylons?.length ?? 0;
   }
-  return supports * 4 + pylons;
+  return kindFor(supports, pylons);
 }
 
 /** Turns placed units into chainages, rising whichever end the frame counts from. */

@@ -1,5 +1,5 @@
 import type { CostTable } from '../model/index.ts';
-import type { Candidate } from './candidate.ts';
+import { kindFor, type Candidate } from './candidate.ts';
 import type { Counter } from './counter.ts';
 import { supportCosts } from './curves.ts';
 import type { Frame } from './frame.ts';
@@ -8,6 +8,7 @@ import { KEPT, type ArrangeRequest } from './request.ts';
 import { fewestSpans, governingSpans, mostSpans } from './governingSpans.ts';
 import { searchUnit } from './unitSearch.ts';
 import type { UnitTask } from './unitTask.ts';
+import { worthOf } from './worth.ts';
 
 /** Why a number of spans cannot be laid out with one governing span: open ground first, then the barred stretches. */
 function reasonFor(frame: Frame, limits: Limits, spans: number, governingM: number): string {
@@ -43,6 +44,7 @@ export function continuousCandidates(
   const { form } = request;
   const most = Math.min(limits.maxSpanM, frame.lengthM);
   const supports = supportCosts(table, form, frame, Math.min(limits.minSpacingM, most), most);
+  const worth = worthOf(request.keep ?? KEPT);
   const task: UnitTask = {
     form,
     X: frame.X,
@@ -50,26 +52,29 @@ export function continuousCandidates(
     lastEnd: last,
     limits,
     supports,
-    keep: request.keep ?? KEPT,
     endIsPier: false,
+    wantedUpTo: worth.boundCost,
   };
   const found = new Map<string, Candidate>();
   const laid = new Set<string>();
   const cut = searchUnit(task, table, (_, spans, governingM, estimate, trace) => {
+    worth.add(spans, estimate);
     laid.add(`${governingM} ${spans}`);
-    const at = trace();
+    const at = trace()();
     const name = at.join();
     const known = found.get(name);
     if (known !== undefined && known.estimate <= estimate) return true;
     const fault = spanFault(spansAlong(frame.X, at), limits);
-    if (fault === null) found.set(name, { placed: [{ form, role: 'main', at }], estimate });
+    if (fault === null)
+      found.set(name, { kind: kindFor(at.length, 0), estimate, placed: () => [{ form, role: 'main', at }] });
     else dropped.add(fault);
     return found.size < enough;
   });
   for (const governingM of governingSpans(task)) {
     for (let k = fewestSpans(limits, frame.lengthM, governingM); k <= mostSpans(task, governingM); k += 1) {
       if (laid.has(`${governingM} ${k}`)) continue;
-      dropped.add(cut.has(governingM) ? 'dearer than those kept' : reasonFor(frame, limits, k, governingM));
+      const isDear = k >= (cut.get(governingM) ?? Infinity);
+      dropped.add(isDear ? 'dearer than those kept' : reasonFor(frame, limits, k, governingM));
     }
   }
   return [...found.values()];

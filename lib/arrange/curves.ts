@@ -93,9 +93,12 @@ export function supportCosts(
 ): SupportCosts {
   const growth = Math.cbrt(Math.max(mostM / leastM, 1.01));
   const knots = [0, 1, 2, 3].map((k) => leastM * growth ** k);
-  const C = knots.map((span) =>
-    frame.chainageM.map((chainageM) => table.support(form, chainageM, span, span)),
-  );
+  const { chainageM } = frame;
+  const C = knots.map((span) => {
+    const costs = new Float64Array(chainageM.length);
+    for (let i = 0; i < costs.length; i += 1) costs[i] = table.support(form, chainageM[i]!, span, span);
+    return costs;
+  });
   return { knots, C };
 }
 
@@ -103,6 +106,20 @@ function knotBefore(knots: readonly number[], span: number): number {
   let k = 0;
   while (k < knots.length - 2 && knots[k + 1]! < span) k += 1;
   return k;
+}
+
+/** Mean cost of a support over all positions, money, by the equal spans beside it, m. */
+export function meanSupport({ knots, C }: SupportCosts): (spanM: number) => number {
+  const means = C.map((column) => {
+    let sum = 0;
+    for (let i = 0; i < column.length; i += 1) sum += column[i]!;
+    return sum / column.length;
+  });
+  return (spanM) => {
+    const k = knotBefore(knots, spanM);
+    const share = (spanM - knots[k]!) / (knots[k + 1]! - knots[k]!);
+    return means[k]! + share * (means[k + 1]! - means[k]!);
+  };
 }
 
 /**

@@ -1,6 +1,6 @@
 import type { CostTable, FormId } from '../model/index.ts';
 import { approachesTo, type Approach } from './approaches.ts';
-import type { Candidate, PlacedUnit } from './candidate.ts';
+import { kindFor, type Candidate, type PlacedUnit } from './candidate.ts';
 import type { Counter } from './counter.ts';
 import { halfCosts, supportCosts, type SupportCosts } from './curves.ts';
 import type { Frame } from './frame.ts';
@@ -179,13 +179,17 @@ export function mainUnitCandidates(
     strideOf(first, last),
   );
   refine(search, [...best.values()], Math.max(...strides));
-  const found: Candidate[] = [];
-  for (const { at, pylons, before, after, cost } of best.values()) {
+  const placedOf = ({ at, pylons, before, after }: MainLayout): PlacedUnit[] => {
     const placed: PlacedUnit[] = [];
     if (before.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: before.at() });
     placed.push(sides?.hung === true ? { form, role: 'main', at, pylons } : { form, role: 'main', at });
     if (after.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: after.at() });
-    found.push({ placed, estimate: cost });
-  }
-  return found;
+    return placed;
+  };
+  return Array.from(best.values(), (layout): Candidate => {
+    const { at, pylons, before, after, cost } = layout;
+    const supports = before.spans + at.length + after.spans;
+    const kind = kindFor(supports, sides?.hung === true ? pylons.length : 0);
+    return { kind, estimate: cost, placed: () => placedOf(layout) };
+  });
 }

@@ -1,17 +1,8 @@
 import type { Pattern } from '../model/index.ts';
-import type { Approach } from './approaches.ts';
 import { endWorksAs, spanCostAt, spanCosts, type SpanCosts } from './curves.ts';
 import { SLACK } from './limits.ts';
 import type { MainSearch } from './mainSearch.ts';
-
-/** A side or back span with the approach beyond it. */
-interface Side {
-  readonly end: number;
-  readonly cost: number;
-  readonly approach: Approach;
-}
-
-const KEPT = 3;
+import { takeCheapest, type SideEnds } from './sideRoom.ts';
 
 /** First of the rising indices whose position is `fromM` or beyond, by its place among them. */
 function firstFrom(X: Float64Array, indices: readonly number[], fromM: number): number {
@@ -26,8 +17,8 @@ function firstFrom(X: Float64Array, indices: readonly number[], fromM: number): 
 }
 
 /**
- * Cheapest ends of the span beyond a pylon, each with its approach, at most one for each number of approach spans:
- * the span over the main span lies in `window`.
+ * Cheapest ends of the span beyond a pylon, each with its approach, at most one for each number of approach spans: the
+ * span over the main span lies in `window`. They are left in the room of the search.
  */
 function sidesBeyond(
   search: MainSearch,
@@ -36,15 +27,16 @@ function sidesBeyond(
   window: readonly [number, number],
   row: MainRow,
   toLeft: boolean,
-): Side[] {
-  const { X } = search;
+): SideEnds {
+  const { X, room } = search;
   const ends = toLeft ? search.outerLeft : search.outerRight;
   const approaches = toLeft ? search.toLeft : search.toRight;
   const last = X.length - 1;
   const least = window[0] * mainM - SLACK;
   const most = Math.min(window[1], 1) * mainM + SLACK;
-  const { spans, costs, ends: at, approaches: beyond } = search.room;
-  let count = 0;
+  const { costs } = room;
+  let fewestSpans = costs.length;
+  let mostSpans = 0;
   const from = toLeft ? X[pylon]! - most : X[pylon]! + least;
   const to = toLeft ? X[pylon]! - least : X[pylon]! + most;
   for (let e = firstFrom(X, ends, from); e < ends.length; e += 1) {
@@ -56,20 +48,19 @@ function sidesBeyond(
     const pier = end > 0 && end < last ? search.half(end, span) : 0;
     const own = spanCostAt(row.side, span) + search.half(pylon, span) + pier;
     for (const approach of lists) {
+      const { spans } = approach;
       const cost = own + approach.cost;
-      let same = 0;
-      while (same < count && spans[same] !== approach.spans) same += 1;
-      if (same < count && !(cost < costs[same]! * (1 - 1e-9))) continue;
-      spans[same] = approach.spans;
-      costs[same] = cost;
-      at[same] = end;
-      beyond[same] = approach;
-      if (same === count) count += 1;
+      if (costs[spans]! < Infinity && !(cost < costs[spans]! * (1 - 1e-9))) continue;
+      costs[spans] = cost;
+      room.ends[spans] = end;
+      room.approaches[spans] = approach;
+      fewestSpans = Math.min(fewestSpans, spans);
+      mostSpans = Math.max(mostSpans, spans);
     }
   }
-  const best = Array.from({ length: count }, (_, i) => i);
-  best.sort((a, b) => costs[a]! - costs[b]! || spans[a]! - spans[b]!);
-  return best.slice(0, KEPT).map((i) => ({ end: at[i]!, cost: costs[i]!, approach: beyond[i]! }));
+  const side = toLeft ? room.left : room.right;
+  takeCheapest(room, side, fewestSpans, mostSpans);
+  return side;
 }
 
 interface Main {
@@ -97,17 +88,18 @@ function onePylon(
   if (beyond.length === 0 || pylon === 0 || pylon === X.length - 1) return false;
   const sides = sidesBeyond(search, pylon, mainM, back, row, pylonLeft);
   const pier = far > 0 && far < X.length - 1 ? half(far, mainM) : 0;
-  for (const side of sides) {
+  for (let i = 0; i < sides.count; i += 1) {
+    const own = sides.approach[i]!;
     for (const approach of beyond) {
-      const cost = main.onePylon + half(pylon, mainM) + pier + side.cost + approach.cost;
-      const spans = side.approach.spans + approach.spans + 2;
-      if (!search.wants(1, spans, mainM, cost)) continue;
-      const at = pylonLeft ? [side.end, pylon, far] : [far, pylon, side.end];
-      const [before, after] = pylonLeft ? [side.approach, approach] : [approach, side.approach];
+      const cost = main.onePylon + half(pylon, mainM) + pier + sides.cost[i]! + approach.cost;
+      if (!search.wants(1, own.spans + approach.spans + 2, mainM, cost)) continue;
+      const end = sides.end[i]!;
+      const at = pylonLeft ? [end, pylon, far] : [far, pylon, end];
+      const [before, after] = pylonLeft ? [own, approach] : [approach, own];
       search.offer({ at, pylons: [1], mainM, cost, before, after });
     }
   }
-  return sides.length > 0;
+  return sides.count > 0;
 }
 
 /** A pylon at both ends of the main span. */
@@ -116,18 +108,19 @@ function twoPylons(search: MainSearch, main: Main, window: readonly [number, num
   const { a, b, mainM, row } = main;
   if (a === 0 || b === X.length - 1) return false;
   const lefts = sidesBeyond(search, a, mainM, window, row, true);
-  if (lefts.length === 0) return false;
+  if (lefts.count === 0) return false;
   const rights = sidesBeyond(search, b, mainM, window, row, false);
-  for (const left of lefts) {
-    for (const right of rights) {
-      const cost = main.twoPylons + half(a, mainM) + half(b, mainM) + left.cost + right.cost;
-      const spans = left.approach.spans + right.approach.spans + 3;
-      if (!search.wants(2, spans, mainM, cost)) continue;
-      const at = [left.end, a, b, right.end];
-      search.offer({ at, pylons: [1, 2], mainM, cost, before: left.approach, after: right.approach });
+  const piers = main.twoPylons + half(a, mainM) + half(b, mainM);
+  for (let l = 0; l < lefts.count; l += 1) {
+    for (let r = 0; r < rights.count; r += 1) {
+      const cost = piers + lefts.cost[l]! + rights.cost[r]!;
+      const [before, after] = [lefts.approach[l]!, rights.approach[r]!];
+      if (!search.wants(2, before.spans + after.spans + 3, mainM, cost)) continue;
+      const at = [lefts.end[l]!, a, b, rights.end[r]!];
+      search.offer({ at, pylons: [1, 2], mainM, cost, before, after });
     }
   }
-  return rights.length > 0;
+  return rights.count > 0;
 }
 
 /** How the spans beside a main span are laid out. */

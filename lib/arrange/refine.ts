@@ -30,13 +30,13 @@ function cheaper(search: MainSearch, layout: MainLayout, at: readonly number[]):
   return { ...layout, at, mainM: own.mainM, cost, before, after };
 }
 
-/** Moves of a row of supports by one step: each alone, neighbours together, all together. */
-function* moves(at: readonly number[], step: number): Generator<number[]> {
-  for (const by of [-step, step]) {
-    for (let s = 0; s < at.length; s += 1) yield at.map((i, k) => (k === s ? i + by : i));
-    for (let s = 1; s < at.length; s += 1) yield at.map((i, k) => (k === s || k === s - 1 ? i + by : i));
-    if (at.length > 2) yield at.map((i) => i + by);
-  }
+/** Supports of a row that move together, first and last: each alone, neighbours, all. */
+function movers(count: number): (readonly [first: number, last: number])[] {
+  const list: (readonly [number, number])[] = [];
+  for (let s = 0; s < count; s += 1) list.push([s, s]);
+  for (let s = 1; s < count; s += 1) list.push([s - 1, s]);
+  if (count > 2) list.push([0, count - 1]);
+  return list;
 }
 
 const rises = (at: readonly number[]): boolean => at.every((i, s) => s === 0 || i > at[s - 1]!);
@@ -49,12 +49,15 @@ export function refine(search: MainSearch, layouts: Iterable<MainLayout>, stride
   if (stride < 2) return;
   for (const start of bestOfKinds(layouts)) {
     let best = start;
+    const together = movers(start.at.length);
     for (let step = Math.ceil(stride / 2); ; step = Math.ceil(step / 2)) {
       for (let round = 0; round < ROUNDS; round += 1) {
         let better: MainLayout | null = null;
-        for (const at of moves(best.at, step)) {
-          if (!rises(at)) continue;
-          better = cheaper(search, better ?? best, at) ?? better;
+        for (const by of [-step, step]) {
+          for (const [first, last] of together) {
+            const at = best.at.map((i, s) => (s >= first && s <= last ? i + by : i));
+            if (rises(at)) better = cheaper(search, better ?? best, at) ?? better;
+          }
         }
         if (better === null) break;
         best = better;

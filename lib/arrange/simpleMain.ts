@@ -26,7 +26,7 @@ export function simpleLayouts(search: MainSearch): void {
     if (search.isEnough()) return;
     for (const b of right) {
       if (b <= a) continue;
-      const own = search.ownCost([a, b], []);
+      const own = simpleCost(search, a, b);
       if (own === null) continue;
       const befores = toLeft[a]!;
       const afters = toRight[b]!;

@@ -11,8 +11,11 @@ export interface UnitTask {
   readonly lastEnd: number;
   readonly limits: Limits;
   readonly supports: SupportCosts;
-  /** Only the cheapest layouts by this many numbers of spans are wanted; layouts that are clearly dearer may be left out. */
-  readonly keep?: number;
   /** Whether the support at the end is a pier, half of which the unit carries. */
   readonly endIsPier: boolean;
+  /**
+   * What a layout to an end may cost, money, and still be wanted: clearly dearer ones may be left out. Asked anew before
+   * each governing span; Infinity where all are wanted and -Infinity where none is.
+   */
+  readonly wantedUpTo: (end: number) => number;
 }
