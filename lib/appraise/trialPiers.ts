@@ -90,9 +90,20 @@ export function trialPiers(
 
   const costs = new Map<number, Float64Array>();
   const intervals = new Map<number, number>();
-  const known = (chainageM: number, load: number, make: PierCost): number => {
+  // Asked twice in turn of one place, for the loads on both sides of a load.
+  let last: { readonly chainageM: number; readonly byLoad: Float64Array } = {
+    chainageM: NaN,
+    byLoad: new Float64Array(),
+  };
+  const byLoadAt = (chainageM: number): Float64Array => {
+    if (chainageM === last.chainageM) return last.byLoad;
     let byLoad = costs.get(chainageM);
     if (!byLoad) costs.set(chainageM, (byLoad = new Float64Array(PIER_LOADS_KN.length).fill(NaN)));
+    last = { chainageM, byLoad };
+    return byLoad;
+  };
+  const known = (chainageM: number, load: number, make: PierCost): number => {
+    const byLoad = byLoadAt(chainageM);
     if (Number.isNaN(byLoad[load]!)) byLoad[load] = make(chainageM, load);
     return byLoad[load]!;
   };

@@ -14,9 +14,6 @@ export interface Approach {
 /** Different numbers of spans kept for each end of an approach. */
 const KEPT = 3;
 
-/** Cost from which a list takes no more. */
-const dearest = (list: readonly Approach[]): number => list[KEPT - 1]?.cost ?? Infinity;
-
 const isBefore = (a: Approach, b: Approach): boolean =>
   a.cost < b.cost || (a.cost === b.cost && a.spans < b.spans);
 
@@ -32,7 +29,8 @@ function insert(list: Approach[], approach: Approach): void {
 
 /**
  * The cheapest approaches from the abutment at position 0 to each position firstEnd..lastEnd, at most three for each,
- * with different numbers of spans. Position 0 itself needs none. Where nothing fits the list is empty.
+ * with different numbers of spans; where any will do, only the first found. Position 0 itself needs none. Where nothing
+ * fits the list is empty.
  */
 export function approachesTo(
   form: FormId,
@@ -42,11 +40,16 @@ export function approachesTo(
   limits: Limits,
   supports: SupportCosts,
   table: CostTable,
+  anyWillDo: boolean,
 ): Approach[][] {
   const lists: Approach[][] = Array.from({ length: X.length }, () => []);
   if (firstEnd === 0) lists[0]!.push({ cost: 0, spans: 0, at: () => [] });
   const first = Math.max(firstEnd, 1);
   if (lastEnd < first) return lists;
+  const wantedUpTo = (end: number): number => {
+    const list = lists[end]!;
+    return anyWillDo && list.length > 0 ? -Infinity : (list[KEPT - 1]?.cost ?? Infinity);
+  };
   const task = {
     form,
     X,
@@ -55,11 +58,11 @@ export function approachesTo(
     limits,
     supports,
     endIsPier: true,
-    wantedUpTo: (end: number) => dearest(lists[end]!),
+    wantedUpTo,
   };
   searchUnit(task, table, (end, spans, governingM, cost, trace) => {
     const list = lists[end]!;
-    if (cost >= dearest(list)) return true;
+    if (cost >= wantedUpTo(end)) return true;
     for (const known of list) if (known.spans === spans && cost >= known.cost) return true;
     const at = trace();
     // The search keeps every window but the least longest span, which an inner span may reach by itself.

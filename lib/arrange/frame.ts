@@ -101,7 +101,8 @@ function build(site: Site, pierHalfWidthM: number, mirrored: boolean): Frame {
   const edges = [...barred.flatMap(({ fromM, toM }) => [fromM, toM]), ...softZones.flat()];
   const X = candidates(lengthM, barred, edges);
   const soft = new Uint8Array(X.length);
-  for (const zone of softZones) for (let i = 0; i < X.length; i += 1) if (inside(X[i]!, zone)) soft[i] = 1;
+  for (const zone of softZones)
+    for (let i = 0; i < X.length && X[i]! < zone[1]; i += 1) if (inside(X[i]!, zone)) soft[i] = 1;
   const main = site.mainOpening;
   const [from, to] = main === null ? [0, 0] : local(site, mirrored, main.fromM, main.toM);
   const middle = (from + to) / 2;

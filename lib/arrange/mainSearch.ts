@@ -25,6 +25,8 @@ export interface MainSearch {
   readonly toLeft: readonly (readonly Approach[])[];
   readonly toRight: readonly (readonly Approach[])[];
   readonly room: SideRoom;
+  /** Deck and fixed cost of a main unit of one span, m. */
+  readonly spanAlone: (mainM: number) => number;
   /** Deck, fixed cost and supports of a main unit alone and its main span, m; null where it may not stand so. */
   readonly ownCost: (
     at: readonly number[],

@@ -64,12 +64,22 @@ function approachesFromEnd(
   limits: Limits,
   supports: SupportCosts,
   table: CostTable,
+  anyWillDo: boolean,
 ): Approach[][] {
   const n = X.length;
   const lengthM = X[n - 1]!;
   const turned = Float64Array.from(X, (_, i) => lengthM - X[n - 1 - i]!);
   const turnedBack = (at: readonly number[]): number[] => at.map((i) => n - 1 - i).reverse();
-  const lists = approachesTo(form, turned, n - 1 - last, n - 1 - first, limits, backwards(supports), table);
+  const lists = approachesTo(
+    form,
+    turned,
+    n - 1 - last,
+    n - 1 - first,
+    limits,
+    backwards(supports),
+    table,
+    anyWillDo,
+  );
   return lists
     .reverse()
     .map((list) => list.map(({ cost, spans, at }) => ({ cost, spans, at: () => turnedBack(at()) })));
@@ -136,11 +146,14 @@ export function mainUnitCandidates(
   const own = halfCosts(supportCosts(table, form, frame, least, most), least, most);
   const approachMost = Math.max(Math.min(approachLimits.maxSpanM, frame.lengthM), least);
   const supports = supportCosts(table, pattern.approach, frame, least, approachMost);
+  // Whether anything fits hangs on whether there is an approach, not on which.
+  const anyWillDo = enough === 1;
   const best = new Map<number, MainLayout>();
   const classM = Math.max(1, frame.lengthM / MAIN_CLASSES);
   // Fewer spans than positions and no more classes than whole metres up to the most: small keys are looked up fast.
   const keyOf = (pylons: number, spans: number, mainM: number): number =>
     (pylons * X.length + spans) * (MAIN_CLASSES + 1) + Math.round(mainM / classM);
+  const alone = new Map<number, number>();
   const rowOf = spanRows({ request, table });
   const sides = sidesOf(pattern);
   const search: MainSearch = {
@@ -155,9 +168,32 @@ export function mainUnitCandidates(
     earliestRight: ranges.right[0],
     outerLeft: places(X, ...ranges.outerLeft),
     outerRight: places(X, ...ranges.outerRight),
-    toLeft: approachesTo(pattern.approach, X, ...ranges.outerLeft, approachLimits, supports, table),
-    toRight: approachesFromEnd(pattern.approach, X, ...ranges.outerRight, approachLimits, supports, table),
+    toLeft: approachesTo(
+      pattern.approach,
+      X,
+      ...ranges.outerLeft,
+      approachLimits,
+      supports,
+      table,
+      anyWillDo,
+    ),
+    toRight: approachesFromEnd(
+      pattern.approach,
+      X,
+      ...ranges.outerRight,
+      approachLimits,
+      supports,
+      table,
+      anyWillDo,
+    ),
     room: sideRoom(X.length),
+    spanAlone(mainM) {
+      // Places lie on a grid, so that many pairs of them are as far apart.
+      let cost = alone.get(mainM);
+      if (cost === undefined)
+        alone.set(mainM, (cost = mainM * table.deckPerM(form, mainM, mainM) + table.unitFixed(form, mainM)));
+      return cost;
+    },
     ownCost: (at, pylons) =>
       sides ? pylonCost(search, sides, rowOf, at, pylons) : simpleCost(search, at[0]!, at[1]!),
     wants(pylons, spans, mainM, cost) {
@@ -178,7 +214,7 @@ export function mainUnitCandidates(
   const strides = [ranges.left, ranges.right, ranges.outerLeft, ranges.outerRight].map(([first, last]) =>
     strideOf(first, last),
   );
-  refine(search, [...best.values()], Math.max(...strides));
+  if (!search.isEnough()) refine(search, [...best.values()], Math.max(...strides));
   const placedOf = ({ at, pylons, before, after }: MainLayout): PlacedUnit[] => {
     const placed: PlacedUnit[] = [];
     if (before.spans > 0) placed.push({ form: pattern.approach, role: 'approach', at: before.at() });

@@ -1,12 +1,13 @@
 import type { CostTable, Site } from '../model/index.ts';
+import { widestBarred } from '../site/index.ts';
 import type { ArrangeRequest, Relaxation, Windows } from './request.ts';
 
 /** Whether anything at all can be laid out. */
 export type Fits = (request: ArrangeRequest, site: Site) => boolean;
 
-/** Cost plays no part in whether something fits. */
+/** Cost plays no part in whether something fits; short governing spans come first, as they are looked through sooner. */
 export const flatTable: CostTable = {
-  deckPerM: () => 1,
+  deckPerM: (_, __, governingM) => governingM,
   depthM: () => 1,
   unitFixed: () => 0,
   support: () => 1,
@@ -40,12 +41,7 @@ function narrowed(site: Site, index: number, widthM: number): Site {
     const middle = (zone.fromM + zone.toM) / 2;
     return { ...zone, fromM: middle - widthM / 2, toM: middle + widthM / 2, hard: widthM > 0 };
   });
-  const hard = zones.filter((zone) => zone.hard);
-  const widest = hard.reduce<Site['mainOpening']>((main, { fromM, toM }) => {
-    const wider = main === null || toM - fromM > main.widthM;
-    return wider ? { fromM, toM, widthM: toM - fromM } : main;
-  }, null);
-  return { ...site, zones, mainOpening: widest };
+  return { ...site, zones, mainOpening: widestBarred(zones, site.startM, site.endM) };
 }
 
 /**

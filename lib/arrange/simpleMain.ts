@@ -7,16 +7,12 @@ export function simpleCost(
   a: number,
   b: number,
 ): { readonly cost: number; readonly mainM: number } | null {
-  const { X, limits, half, table, request } = search;
+  const { X, limits, half } = search;
   if (a > search.latestLeft || b < search.earliestRight) return null;
   const mainM = X[b]! - X[a]!;
   if (!(mainM >= limits.minSpanM - SLACK && mainM <= limits.maxSpanM + SLACK)) return null;
-  const { form } = request;
   const piers = (a > 0 ? half(a, mainM) : 0) + (b < X.length - 1 ? half(b, mainM) : 0);
-  return {
-    cost: mainM * table.deckPerM(form, mainM, mainM) + table.unitFixed(form, mainM) + piers,
-    mainM,
-  };
+  return { cost: search.spanAlone(mainM) + piers, mainM };
 }
 
 /** Main units of one simple span: every pair of places whose span lies in the band, with every approach kept for them. */

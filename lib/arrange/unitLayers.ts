@@ -41,17 +41,16 @@ export function roomFor(n: number, ends: number): Room {
   };
 }
 
-/** Places of one layer, and the places of the layer before from which they are reached. */
-export interface Steps {
-  readonly at: Int32Array;
-  readonly from: Int32Array;
-}
+/** Indices of the places of one layer, and after them the places of the layer before from which they are reached. */
+export type Steps = Int32Array;
 
 /** Takes a closed layout: its end, spans, cost, last support before the end and place of the one before that. */
 export type Closed = (end: number, spans: number, cost: number, z: number, from: number) => boolean;
 
 export interface Layers {
   readonly task: UnitTask;
+  /** As of the whole task, where only some of its ends are still wanted. */
+  readonly isFull: boolean;
   readonly G: number;
   readonly K: number;
   /** Of an inner span, of an end span and of one alone. */

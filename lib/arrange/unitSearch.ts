@@ -148,12 +148,12 @@ function firstFrom(X: Float64Array, x: number): number {
 
 /** One more interior span onto every position it can reach: fills `next`, closes what can end. */
 function oneMore(layers: Layers, j: number, places: Places, next: Places): void {
-  const { task, G, K, cost, half, room } = layers;
+  const { task, isFull, G, K, cost, half, room } = layers;
   const { X, limits, firstEnd, lastEnd } = task;
   const { x } = places;
   const { toGo, most, onto } = room;
   const least = Math.max(limits.minSpacingM, limits.interiorLeast * G) - SLACK;
-  const nearest = Math.max(x[0]! + least, isFull(task) ? 0 : (j - MORE_SPANS - 1) * G - SLACK);
+  const nearest = Math.max(x[0]! + least, isFull ? 0 : (j - MORE_SPANS - 1) * G - SLACK);
   const farthest = Math.min(x[places.count - 1]! + G, X[lastEnd]! - limits.minSpacingM) + SLACK;
   const closes = X[firstEnd]! - G - SLACK;
   next.count = 0;
@@ -181,18 +181,23 @@ function traceOf(back: readonly Steps[], k: number, end: number, z: number, from
   if (k >= 2) at[k - 1] = z;
   let p = from;
   for (let j = k - 2; j >= 1; j -= 1) {
-    at[j] = back[j]!.at[p]!;
-    p = back[j]!.from[p]!;
+    const steps = back[j]!;
+    at[j] = steps[p]!;
+    p = steps[p + steps.length / 2]!;
   }
   at[0] = 0;
   return at;
 }
 
 /** Keeps what leads back from the places of a layer. */
-const stepsOf = ({ at, from, count }: Places): Steps => ({
-  at: at.slice(0, count),
-  from: from.slice(0, count),
-});
+function stepsOf({ at, from, count }: Places): Steps {
+  const steps = new Int32Array(2 * count);
+  for (let p = 0; p < count; p += 1) {
+    steps[p] = at[p]!;
+    steps[count + p] = from[p]!;
+  }
+  return steps;
+}
 
 /**
  * Lays out one governing span, one layer of spans on the other, and hands on what each layer closes. False where
@@ -216,26 +221,37 @@ function layLayers(layers: Layers, closed: Closed): boolean {
   return true;
 }
 
+/** The task between the first and the last end of which a layout is still wanted; null where there is none. */
+function betweenWanted(task: UnitTask): UnitTask | null {
+  let { firstEnd, lastEnd } = task;
+  while (firstEnd <= lastEnd && task.wantedUpTo(firstEnd) === -Infinity) firstEnd += 1;
+  while (lastEnd > firstEnd && task.wantedUpTo(lastEnd) === -Infinity) lastEnd -= 1;
+  return firstEnd <= lastEnd ? { ...task, firstEnd, lastEnd } : null;
+}
+
 /**
  * Lays out one continuous unit for every governing span of its band by dynamic programming over the candidate
  * positions, one layer per span; end windows tie the two outermost pairs of spans. Costs are those of the table with
  * support costs split between neighbouring spans; the fixed cost of the unit is included. Gives back the governing
  * spans of which something was left out as too dear, with the fewest spans that each can be laid out in.
  */
-export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): ReadonlyMap<number, number> {
-  const { form, limits, X } = task;
-  const ends = task.lastEnd - task.firstEnd + 1;
-  const supportOver = meanSupport(task.supports);
-  const governing = governingSpans(task)
-    .map((G) => ({ G, K: mostSpans(task, G), perM: table.deckPerM(form, G, G) + supportOver(G) / G }))
+export function searchUnit(given: UnitTask, table: CostTable, visit: Visit): ReadonlyMap<number, number> {
+  const { form, limits, X, supports, endIsPier } = given;
+  const ends = given.lastEnd - given.firstEnd + 1;
+  const supportOver = meanSupport(supports);
+  const governing = governingSpans(given)
+    .map((G) => ({ G, K: mostSpans(given, G), perM: table.deckPerM(form, G, G) + supportOver(G) / G }))
     // The nearest end is too far for some with as many spans as are tried.
-    .filter(({ G, K }) => K >= fewestSpans(limits, X[task.firstEnd]!, G))
+    .filter(({ G, K }) => K >= fewestSpans(limits, X[given.firstEnd]!, G))
     // The cheapest with even spans first: they show early what is too dear.
     .sort((a, b) => a.perM - b.perM);
-  const room = roomFor(X.length, ends);
   const cut = new Map<number, number>();
-  const unit = { form, role: task.endIsPier ? 'approach' : 'main' } as const;
+  if (governing.length === 0) return cut;
+  const room = roomFor(X.length, ends);
+  const unit = { form, role: endIsPier ? 'approach' : 'main' } as const;
   for (const { G, K } of governing) {
+    const task = betweenWanted(given);
+    if (task === null) break;
     spansToGo(task, G, room.toGo, room.queue);
     if (room.toGo[0]! > K) continue;
     const cost = spanCosts(table, unit, G);
@@ -243,12 +259,13 @@ export function searchUnit(task: UnitTask, table: CostTable, visit: Visit): Read
     const alone = aloneWorksAs(table, form, G);
     const layers: Layers = {
       task,
+      isFull: isFull(given),
       G,
       K,
       cost,
       endCost: worksAs === 1 ? cost : spanCosts(table, unit, G, worksAs),
       aloneCost: alone === 1 ? cost : spanCosts(table, unit, G, alone),
-      half: halfCosts(task.supports, Math.max(limits.minSpacingM, limits.interiorLeast * G), G),
+      half: halfCosts(supports, Math.max(limits.minSpacingM, limits.interiorLeast * G), G),
       room,
       back: [],
       cut: false,

@@ -13,7 +13,10 @@ interface Least {
 }
 
 function lower(a: SpanCosts, b: SpanCosts): SpanCosts {
-  return a === b ? a : a.map((cost, i) => Math.min(cost, b[i]!));
+  if (a === b) return a;
+  const least = new Float64Array(a.length);
+  for (let i = 0; i < least.length; i += 1) least[i] = Math.min(a[i]!, b[i]!);
+  return least;
 }
 
 /** Least of the values at the piers in every stretch as long as the governing span, and in those beside it. */

@@ -11,3 +11,4 @@ export { abutmentWindows, roadEndsOf, siteOf, standBetween, type AbutmentWindows
 export { survey } from './survey.ts';
 export { roadCurves } from './roadCurves.ts';
 export { roadLevelAt } from './roadLevelAt.ts';
+export { widestBarred } from './widestBarred.ts';
