@@ -58,16 +58,18 @@ export function continuousCandidates(
   const found = new Map<string, Candidate>();
   const laid = new Set<string>();
   const cut = searchUnit(task, table, (_, spans, governingM, estimate, trace) => {
-    worth.add(spans, estimate);
     laid.add(`${governingM} ${spans}`);
     const at = trace()();
+    const fault = spanFault(spansAlong(frame.X, at), limits);
+    if (fault !== null) {
+      dropped.add(fault);
+      return true;
+    }
+    worth.add(spans, estimate);
     const name = at.join();
     const known = found.get(name);
-    if (known !== undefined && known.estimate <= estimate) return true;
-    const fault = spanFault(spansAlong(frame.X, at), limits);
-    if (fault === null)
+    if (known === undefined || known.estimate > estimate)
       found.set(name, { kind: kindFor(at.length, 0), estimate, placed: () => [{ form, role: 'main', at }] });
-    else dropped.add(fault);
     return found.size < enough;
   });
   for (const governingM of governingSpans(task)) {

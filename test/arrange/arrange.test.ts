@@ -151,6 +151,15 @@ describe('arrange', () => {
     ).toBeGreaterThanOrEqual(52);
   });
 
+  it('arrange(nothing fits) says how far a wide stretch has to give way to short spans', () => {
+    // 111 m on a crossing of 302.5 m; the longest span is 41 m, half a pier of 1.25 m stands clear on each side.
+    const request = { ...composite, windows: { ...composite.windows, minSpanM: 20, maxSpanM: 41 } };
+    const site302 = demoSite(302.5, [[95.6, 206.6, 'river']]);
+    const zone = arrange(request, site302, demoTable()).relaxations.find(({ what }) => what === 'zone')!;
+    expect(zone.to).toBeLessThanOrEqual(38.5);
+    expect(zone.to).toBeGreaterThanOrEqual(37.5);
+  });
+
   it('arrange(nothing fits) asks of no stretch to give way that does not stand in the way', () => {
     // The main span goes over the two that overlap, 58 m and half a pier of 1.25 m on each side; the approaches over the rest.
     const zones: DemoZone[] = [
