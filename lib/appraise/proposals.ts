@@ -1,4 +1,4 @@
-import { arrange } from '../arrange/index.ts';
+import { arrange, fits, flatTable } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
 import type { Arrangement, FormId, MethodId, Pattern } from '../model/index.ts';
 import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
@@ -70,6 +70,16 @@ function patternsFor({ site, tables }: Workbench, asked: FormAndMethod): readonl
   return [pattern, ...alsoPatterns.filter(({ approach }) => openSpans(approach, site.lengthM))];
 }
 
+/**
+ * Whether any pattern of a form fits a site, whatever it costs: where none does, none of its trial units is worth sizing.
+ * Not asked where the abutments may move, and where back-stays, which are sized, have a say.
+ */
+function mayFit(bench: Workbench, asked: FormAndMethod): boolean {
+  const { site } = bench;
+  if (site.windows || formModule(asked.form).pattern.kind === 'pylon') return true;
+  return patternsFor(bench, asked).some((pattern) => fits(requestFor(asked, site, pattern), site));
+}
+
 /** Options are told apart by their number of supports: the cheaper of two with as many stays. */
 const isFirstOfItsSupports = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
   all.findIndex((other) => supportsOf(other) === supportsOf(one)) === i;
@@ -92,14 +102,16 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
   const because: string[] = [];
   const byOne = function* (method: MethodId): Work<readonly Arrangement[]> {
     const asked = { form, method };
-    for (const rows of bench.tables.rowsOf(asked)) {
+    const isSized = mayFit(bench, asked);
+    for (const rows of isSized ? bench.tables.rowsOf(asked) : []) {
       for (const index of rows.spansM.keys()) yield* rows.make(index);
     }
     const found: Arrangement[] = [];
     const on = function* (at: Workbench): Work<readonly Arrangement[]> {
       const here: Arrangement[] = [];
       for (const pattern of patternsFor(at, asked)) {
-        const result = arrange(requestFor(asked, at.site, pattern), at.site, at.tables.tableFor(asked));
+        const table = isSized ? at.tables.tableFor(asked) : flatTable;
+        const result = arrange(requestFor(asked, at.site, pattern), at.site, table);
         for (const dropped of result.dropped) count(dropped.reason, dropped.count);
         if (found.length + here.length === 0) because.push(...result.relaxations.map(relaxationWords));
         here.push(...result.arrangements);

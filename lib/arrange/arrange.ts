@@ -48,6 +48,9 @@ function fitter(): Fits {
   };
 }
 
+/** Whether anything of a request fits a site, whatever it costs. */
+export const fits: Fits = (request, site) => fitter()(request, site);
+
 /**
  * The best different arrangements of one form on one site by the cost table: the cheapest for each number of supports
  * (and of pylons), at most `keep` of them, cheapest first. Supports stand on a grid of 1 m and on the edges of zones,
