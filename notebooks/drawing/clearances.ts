@@ -2,12 +2,12 @@ import type { AppraisedOption, Obstacle, Site } from '../model.ts';
 import { groundLevel, leastSoffit, lowestSoffit } from './alongOption.ts';
 import type { Asked } from './asked.ts';
 import { overOf } from './asked.ts';
-import { dimensionChain, uprightDimension } from './dimension.ts';
+import { dimensionChain, figureLines, uprightDimension, type Figure } from './dimension.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
-import type { Placer } from './placer.ts';
+import type { Box, Placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num, pathOf } from './piece.ts';
 import { length, level } from '../format.ts';
@@ -89,11 +89,26 @@ function spareOver(site: Site, option: AppraisedOption | null, one: Envelope): S
   };
 }
 
+/** An upright dimension beside an envelope stands this far from it, px. */
+const LINE_AT_PX = 7;
+/** From the line of an upright dimension to its figure, px. */
+const LINED_PX = 7;
+
+type LineAnchor = 'start' | 'middle' | 'end';
+
+/** Where the headroom of an envelope may be written, with its dimension line or without. */
+interface Beside {
+  readonly x: number;
+  readonly anchor: LineAnchor;
+  readonly isLined: boolean;
+  readonly box: Box;
+}
+
 /** One envelope: its outline, and its headroom with what is spare, inside it or at the side where there is room. */
 function envelopePiece(
   frame: Frame,
   one: Envelope,
-  { words: spare, figure }: Spare,
+  { words: spare, figure: spareFigure }: Spare,
   accent: string,
   room: Placer,
   isBare: boolean,
@@ -145,37 +160,48 @@ function envelopePiece(
       }),
     );
   }
-  const wide = Math.max(textWidth(headroom, letters.drawing), textWidth(spare, letters.drawing)) + 14;
-  const box = { top: (top + foot) / 2 - 8, bottom: (top + foot) / 2 + (spare === '' ? 6 : 19) };
-  const sides = [
-    { left: right + 3, right: right + 3 + wide, ...box },
-    { left: left - 3 - wide, right: left - 3, ...box },
+  const widest = Math.max(textWidth(headroom, letters.drawing), textWidth(spare, letters.drawing));
+  const middle = (top + foot) / 2;
+  const [high, low] = spare === '' ? [middle - 6, middle + 6] : [middle - 11, middle + 12];
+  const width = right - left;
+  const beside = (x: number, anchor: LineAnchor, isLined: boolean): Beside => {
+    const reach = widest + (isLined ? LINED_PX : 0);
+    const from = anchor === 'middle' ? x - reach / 2 : anchor === 'end' ? x - reach : x;
+    return { x, anchor, isLined, box: { left: from, right: from + reach, top: high, bottom: low } };
+  };
+  const [outer, lined, bare] = [LINE_AT_PX, true, false];
+  const places = [
+    beside(right + outer, 'start', lined),
+    beside(left - outer, 'end', lined),
     // Within it where it is wide enough, off what crosses below its middle.
-    ...(right - left > 1.3 * wide
-      ? [
-          { left: right - 3 - wide, right: right - 3, ...box },
-          { left: left + 3, right: left + 3 + wide, ...box },
-        ]
+    ...(width > 1.3 * (widest + LINED_PX + outer)
+      ? [beside(right - outer, 'end', lined), beside(left + outer, 'start', lined)]
       : []),
+    // Without its line where it has no room beside one.
+    ...(width > widest + 8 && foot - top > low - high ? [beside((left + right) / 2, 'middle', bare)] : []),
+    beside(right + 4, 'start', bare),
+    beside(left - 4, 'end', bare),
   ];
-  const place = Math.max(0, room.choose(sides));
-  const atLeft = place === 1 || place === 2;
-  const x = [right + 7, left - 7, right - 7, left + 7][place] ?? right + 7;
+  const { x, anchor, isLined } = places[room.choose(places.map(({ box }) => box))]!;
+  const figure: Figure = {
+    words: headroom,
+    colour: accent,
+    asked: one.path === undefined ? undefined : `${one.path}/headroomM`,
+  };
+  const under: Figure | undefined =
+    spare === ''
+      ? undefined
+      : { words: spare, colour: spare.endsWith('low') ? accent : colours.ink, asked: spareFigure };
   return g(
     {},
     outline,
-    uprightDimension(x, top, foot, headroom, {
-      colour: accent,
-      side: atLeft ? 'left' : 'right',
-      asked: one.path === undefined ? undefined : `${one.path}/headroomM`,
-    }),
-    spare !== '' &&
-      label(x + (atLeft ? -6 : 6), (top + foot) / 2 + 17, spare, {
-        anchor: atLeft ? 'end' : 'start',
-        fill: spare.endsWith('low') ? accent : colours.ink,
-        halo: true,
-        figure,
-      }),
+    isLined
+      ? uprightDimension(x, top, foot, headroom, {
+          ...figure,
+          side: anchor === 'end' ? 'left' : 'right',
+          under,
+        })
+      : figureLines(x, middle, [figure, under], { anchor, halo: true }),
   );
 }
 

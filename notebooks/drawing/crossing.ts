@@ -1,4 +1,4 @@
-import { fixed, length, radiusText } from '../format.ts';
+import { fixed, length, radiusText, signed } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
 import { siteOf } from '../model.ts';
@@ -72,8 +72,7 @@ function withChange(figure: string, change: string, spanM: number, frame: Frame,
 function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
   const { pieces, crestRadiusM } = option.profile;
   const onBridge = pieces.filter(({ fromM, toM }) => fromM >= site.startM && toM <= site.endM);
-  const say = (slope: number): string =>
-    `${slope < -0.00005 ? '−' : '+'}${Math.abs(slope * 100).toFixed(1)} %`;
+  const say = (slope: number): string => `${signed(slope * 100, 1)} %`;
   const first = onBridge[0];
   const last = onBridge[onBridge.length - 1];
   const after = last ? last.gradient + last.curvature1PerM * (last.toM - last.fromM) : NaN;
@@ -170,7 +169,7 @@ export function crossing(input: CrossingInput): Piece {
   const depths = option === null || small ? [] : depthMarks(site, option, room);
   // On a hand-held screen lettering of levels and founding would touch.
   const cramped = small || widthPx < 480;
-  const levels = cramped ? [] : levelMarks(site, input.obstacles, room);
+  const levels = cramped ? [] : levelMarks(site, option, input.obstacles, room);
   const named = names(site, room);
   const below = cramped ? [] : belowGround(site, option, room, range.bottomM);
 
@@ -248,6 +247,8 @@ export function crossing(input: CrossingInput): Piece {
         dimensionChain([frame.x(ends.startM), frame.x(ends.endM)], dimensionTop, [total], {
           weight: 600,
           size: letters.table,
+          // The axis of a support may run through it.
+          halo: true,
           asked: [isShorter ? `options/${String(option.number)}/lengthM` : 'site/lengthM'],
         }),
       inside.length > 1 &&

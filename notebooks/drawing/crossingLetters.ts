@@ -1,5 +1,6 @@
 import { fixed, level } from '../format.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
+import { siteOf } from '../model.ts';
 import {
   depthAt,
   groundLevel,
@@ -31,10 +32,36 @@ export interface Room {
   readonly accent: string;
 }
 
-/** Levels of water, flood and rail on shelves, each where there is most room along its own line. */
-export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefined, room: Room): Piece[] {
+/** How far from the upright of an envelope the flag of its foot may stand, px. */
+const OUTSIDE_PX = [8, 24, 44, 70, 98] as const;
+
+/** A flag that overlaps by more than this stands in the way of something, px2. */
+const IN_THE_WAY = 40;
+
+/** Ground and fill that may stand over the foot of a flag, m. */
+const BURIED_M = 0.3;
+
+/**
+ * Levels of water, flood, rail and road on shelves, each where there is most room along its own line: in the open where
+ * there is a place, and without the word for what it is where only the figure has room.
+ */
+export function levelMarks(
+  site: Site,
+  option: AppraisedOption | null,
+  obstacles: readonly Obstacle[] | undefined,
+  room: Room,
+): Piece[] {
   const { frame } = room;
-  const marks: { at: readonly number[]; levelM: number; words: string; water: boolean; asked: Asked }[] = [];
+  const ends = option === null ? site : siteOf(site, option.units);
+  const isOpen = (m: number, levelM: number): boolean =>
+    m > ends.startM && m < ends.endM && groundLevel(site, m) < levelM + BURIED_M;
+  const marks: {
+    at: readonly number[];
+    levelM: number;
+    words: string;
+    water: boolean;
+    asked: Asked;
+  }[] = [];
   for (const [index, water] of site.waters.entries()) {
     const at = [0.2, 0.14, 0.25, 0.82, 0.76, 0.5].map(
       (part) => water.fromM + part * (water.toM - water.fromM),
@@ -56,20 +83,22 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
       asked: `site/waters/${String(water)}/floodLevelM`,
     });
   }
-  for (const [index, { kind, clearance }] of (obstacles ?? []).entries()) {
+  for (const [index, obstacle] of (obstacles ?? []).entries()) {
+    const { kind, clearance } = obstacle;
     if (clearance === null || kind === 'river') continue;
+    const isOthers = (m: number): boolean =>
+      obstacles!.some((other) => other !== obstacle && m > other.fromM && m < other.toM);
+    const outside = [
+      ...OUTSIDE_PX.map((px) => clearance.fromM - px / frame.pxPerM),
+      ...OUTSIDE_PX.map((px) => clearance.toM + px / frame.pxPerM),
+    ];
     marks.push({
       at: [
-        clearance.fromM - 3,
-        clearance.fromM - 8,
-        clearance.fromM - 13,
-        clearance.toM + 4,
-        clearance.toM + 11,
-        clearance.toM + 15,
-        // Within an envelope that is wide enough for the words.
-        ...[0.7, 0.5, 0.3]
-          .filter(() => (clearance.toM - clearance.fromM) * frame.pxPerM > 150)
-          .map((part) => clearance.fromM + part * (clearance.toM - clearance.fromM)),
+        ...outside.filter((m) => !isOthers(m)),
+        // Within the envelope, at its ends and along it.
+        clearance.fromM + OUTSIDE_PX[0] / frame.pxPerM,
+        clearance.toM - OUTSIDE_PX[0] / frame.pxPerM,
+        ...[0.7, 0.5, 0.3].map((part) => clearance.fromM + part * (clearance.toM - clearance.fromM)),
       ],
       levelM: clearance.datumLevelM,
       words: `${level(clearance.datumLevelM)} ${kind === 'railway' ? 'rail' : kind}`,
@@ -78,16 +107,18 @@ export function levelMarks(site: Site, obstacles: readonly Obstacle[] | undefine
     });
   }
   return marks.flatMap(({ at, levelM, words, water, asked }) => {
-    const candidates = at
-      .filter((m) => m > frame.fromM && m < frame.toM)
-      .flatMap((m) => (['right', 'left'] as const).map((side) => ({ x: frame.x(m), side })));
-    const chosen =
-      candidates[
-        room.placer.choose(candidates.map(({ x, side }) => levelMarkBox(x, frame.y(levelM), words, side)))
-      ];
-    return chosen === undefined
-      ? []
-      : [levelMark(chosen.x, frame.y(levelM), words, { side: chosen.side, water, asked })];
+    const shown = at.filter((m) => m > frame.fromM && m < frame.toM);
+    const open = shown.filter((m) => isOpen(m, levelM));
+    const candidates = (open.length > 0 ? open : shown).flatMap((m) =>
+      (['right', 'left'] as const).map((side) => ({ x: frame.x(m), side })),
+    );
+    const y = frame.y(levelM);
+    const put = (said: string, limit: number): Piece | null => {
+      const boxes = candidates.map(({ x, side }) => levelMarkBox(x, y, said, side));
+      const chosen = candidates[room.placer.choose(boxes, limit)];
+      return chosen === undefined ? null : levelMark(chosen.x, y, said, { side: chosen.side, water, asked });
+    };
+    return put(words, IN_THE_WAY) ?? put(level(levelM), Infinity) ?? [];
   });
 }
 
@@ -174,7 +205,7 @@ export function names(site: Site, room: Room): (Piece | null)[] {
       const half = textWidth(zone.name, letters.drawing) / 2;
       const onSheet = (x: number): number =>
         Math.min(Math.max(x, frame.left + half), Math.max(frame.right - half, frame.left + half));
-      const places = [16, 20, 28].flatMap((down) =>
+      const places = [16, 20, 28, 36, 44].flatMap((down) =>
         [0, -24, 24, -48].map((shift) => [onSheet(frame.x(middle) + shift), y + down] as const),
       );
       return freeLabel(room, places, zone.name, { italic: true, anchor: 'middle', fill: colours.second });
@@ -196,6 +227,9 @@ function toePath(option: AppraisedOption, index: number): Asked {
     : `${at}/piles/toeLevelM`;
 }
 
+/** Where along its line a bearing stratum may be named, as shares of the room there is, the end first. */
+const STRATUM_PLACES = Array.from({ length: 17 }, (_, i) => 0.9 - 0.05 * i);
+
 /** Founding levels with their spread beside the piles, and the bearing stratum named on its own line. */
 export function belowGround(
   site: Site,
@@ -212,8 +246,8 @@ export function belowGround(
     const words = `${foundation.piles === null ? 'founded' : 'toe'} ${fixed(toe, 1)}${spread > 0.05 ? ` ± ${spread.toFixed(spread < 5 ? 1 : 0)}` : ''}`;
     const y = Math.min(frame.y(Math.max(toe, lowestM)), frame.y(lowestM)) - 2;
     const right = frame.x(support.chainageM + foundation.footing.lengthM / 2) + 4;
-    const left =
-      frame.x(support.chainageM - foundation.footing.lengthM / 2) - 4 - textWidth(words, letters.drawing);
+    const widthPx = textWidth(words, letters.drawing);
+    const left = frame.x(support.chainageM - foundation.footing.lengthM / 2) - 4 - widthPx;
     return freeLabel(
       room,
       [
@@ -221,6 +255,8 @@ export function belowGround(
         [left, y],
         [right, y - 12],
         [left, y - 12],
+        // Under a footing; under piles the end of the drawing is near.
+        ...(foundation.piles === null ? [[frame.x(support.chainageM) - widthPx / 2, y + 14] as const] : []),
       ],
       words,
       { fill: colours.second, figure: option === null ? undefined : toePath(option, index) },
@@ -230,33 +266,48 @@ export function belowGround(
   const bearing = site.groundStretches.map((stretch) => {
     const stratum = stratumOf(stretch);
     if (stratum === null || stratum.likelyM < lowestM || said.has(stratum.words)) return null;
-    const from = Math.max(stratum.fromM, frame.fromM);
-    const to = Math.min(stratum.toM, frame.toM);
-    const width = textWidth(stratum.words, letters.drawing) + 12;
-    if ((to - from) * frame.pxPerM < width + 20) return null;
+    const from = frame.x(Math.max(stratum.fromM, frame.fromM));
+    const to = frame.x(Math.min(stratum.toM, frame.toM));
     const y = frame.y(stratum.likelyM);
-    const candidates = [0.85, 0.7, 0.55, 0.4, 0.25, 0.1].flatMap((part) => [
-      { x: frame.x(from) + part * ((to - from) * frame.pxPerM - width) },
-    ]);
-    const chosen =
-      candidates[
-        room.placer.choose(
-          candidates.map(({ x }) => levelMarkBox(x, y, stratum.words, 'right')),
-          400,
-        )
-      ];
-    if (chosen === undefined) return null;
-    said.add(stratum.words);
-    return levelMark(chosen.x, y, stratum.words, { colour: colours.second });
+    const put = (words: string): Piece | null => {
+      const width = textWidth(words, letters.drawing) + 12;
+      if (to - from < width + 20) return null;
+      const candidates = STRATUM_PLACES.map((part) => from + part * (to - from - width));
+      const boxes = candidates.map((x) => levelMarkBox(x, y, words, 'right'));
+      const x = candidates[room.placer.choose(boxes, IN_THE_WAY)];
+      return x === undefined ? null : levelMark(x, y, words, { colour: colours.second });
+    };
+    const mark = put(stratum.words) ?? put(stratum.short);
+    if (mark !== null) said.add(stratum.words);
+    return mark;
   });
   return [...toes, ...bearing];
 }
+
+/** A deck is taken in pieces about as long as this, so that one on a slope takes no more than its own depth, px. */
+const DECK_PIECE_PX = 40;
+
+/** How bad it is to write over a pier or a wall, and how far lettering keeps off it, px. */
+const STRUCTURE = 6;
+const CLEAR_PX = 3;
 
 /** Everything lettering must keep off: structure, ground, supports. */
 export function takeRoom(site: Site, option: AppraisedOption | null, frame: Frame, room: Placer): void {
   room.takeLine(groundPoints(site, frame), 2, 1.4);
   if (option === null) return;
-  for (const { design, fromM } of placedUnits(option)) {
+  for (const { unit, design, fromM, toM } of placedUnits(option)) {
+    for (const { support, footM } of design.walls ?? []) {
+      const at = unit.supportsM[support]!;
+      room.take(
+        {
+          left: frame.x(at - footM / 2) - CLEAR_PX,
+          right: frame.x(at + footM / 2) + CLEAR_PX,
+          top: frame.y(soffitLevel(site, option, at)),
+          bottom: frame.y(groundLevel(site, at)),
+        },
+        STRUCTURE,
+      );
+    }
     for (const shape of design.elevation) {
       if (shape.faint === true) continue;
       const points = shape.points.map(
@@ -264,15 +315,16 @@ export function takeRoom(site: Site, option: AppraisedOption | null, frame: Fram
       );
       room.takeLine(points, 1.5, 1);
     }
-    const { xM, depthM } = design.depthAlong;
-    for (let i = 1; i < xM.length; i += 1) {
-      const at = fromM + (xM[i] ?? 0);
+    const pieces = Math.max(1, Math.ceil(((toM - fromM) * frame.pxPerM) / DECK_PIECE_PX));
+    const place = (i: number): number => fromM + ((toM - fromM) * i) / pieces;
+    for (let i = 0; i < pieces; i += 1) {
+      const [left, middle, right] = [place(i), place(i + 0.5), place(i + 1)];
       room.take(
         {
-          left: frame.x(fromM + (xM[i - 1] ?? 0)),
-          right: frame.x(at),
-          top: frame.y(roadLevel(option, at) + 1.1),
-          bottom: frame.y(slabLevel(site, option, at) - (depthM[i] ?? 0)),
+          left: frame.x(left),
+          right: frame.x(right),
+          top: frame.y(roadLevel(option, middle) + 1.1),
+          bottom: frame.y(soffitLevel(site, option, middle)),
         },
         2,
       );
@@ -283,12 +335,12 @@ export function takeRoom(site: Site, option: AppraisedOption | null, frame: Fram
     const half = Math.max(support.shaft.lengthM, 1) / 2;
     room.take(
       {
-        left: frame.x(support.chainageM - half),
-        right: frame.x(support.chainageM + half),
+        left: frame.x(support.chainageM - half) - CLEAR_PX,
+        right: frame.x(support.chainageM + half) + CLEAR_PX,
         top: frame.y(support.topLevelM),
         bottom: frame.y(foundation?.footing.topLevelM ?? support.groundLevelM),
       },
-      2,
+      STRUCTURE,
     );
     if (foundation !== null) {
       const wide = foundation.footing.lengthM / 2;
@@ -299,7 +351,7 @@ export function takeRoom(site: Site, option: AppraisedOption | null, frame: Fram
           top: frame.y(foundation.footing.topLevelM),
           bottom: frame.y(toeLevel(foundation)),
         },
-        1.2,
+        3,
       );
     }
   }

@@ -26,8 +26,8 @@ const nameRoom = 46;
 
 /**
  * Chainages at which the band states its figures: supports first, then ends of limits and barred stretches, then bends
- * of the ground, then tens; each is taken only where there is room for its figure. Where the deck hangs into an envelope the
- * place at which it hangs lowest steps aside for a support, further along the envelope.
+ * of the ground, then tens; each is taken only where there is room for its figure. The place of an envelope at which least
+ * is left steps aside for a support, further along the envelope: what is said to be spare is in the band.
  */
 function bandChainages(
   site: Site,
@@ -51,10 +51,11 @@ function bandChainages(
       const room = (x: number): number =>
         option === null ? 0 : lowestSoffit(site, option, x) - limit.levelM;
       const places = at.sort((one, other) => room(one) - room(other));
-      return { places, hangs: room(places[0]!) < -0.005, middleM: (limit.fromM + limit.toM) / 2 };
+      return { places, middleM: (limit.fromM + limit.toM) / 2 };
     });
   const tens: number[] = [];
   for (let x = Math.ceil(site.startM / 10) * 10; x <= site.endM; x += 10) tens.push(x);
+  const widthOf = (at: number): number => Math.max(pitch, textWidth(chainage(at), letters.drawing, 600) + 5);
   const taken: { readonly at: number; readonly x: number }[] = [];
   const [least, most] = [frame.left + nameRoom + 14, frame.right - 16];
   const take = (at: number, isEnd = false, asidePx = 0): boolean => {
@@ -62,7 +63,8 @@ function bandChainages(
     // Figures of an abutment at the edge of the sheet step inside: they say their chainage.
     const x = isEnd ? Math.max(least, Math.min(most, home)) : home;
     if (at < frame.fromM || at > frame.toM || x < least || x > most) return false;
-    if (taken.some((other) => Math.abs(other.x - x) < pitch)) return false;
+    const room = (other: number): number => (widthOf(at) + widthOf(other)) / 2;
+    if (taken.some((other) => Math.abs(other.x - x) < room(other.at))) return false;
     taken.push({ at, x });
     return true;
   };
@@ -70,12 +72,11 @@ function bandChainages(
   take(site.startM, true);
   take(site.endM, true);
   for (const at of supports) take(at);
-  const steps = Array.from({ length: Math.ceil(pitch) + 1 }, (_, px) => px);
-  for (const { places, hangs, middleM } of tightest) {
+  const steps = Array.from({ length: 2 * Math.ceil(pitch) }, (_, px) => px);
+  for (const { places, middleM } of tightest) {
     const [lowest] = places as [number, ...number[]];
     const inwards = Math.sign(middleM - lowest);
-    if (hangs && steps.some((px) => take(lowest, false, inwards * px))) continue;
-    places.some((at) => take(at));
+    if (!steps.some((px) => take(lowest, false, inwards * px))) places.some((at) => take(at));
   }
   for (const at of [
     ...site.zones.filter((zone) => zone.hard).flatMap((zone) => [zone.fromM, zone.toM]),

@@ -1,6 +1,7 @@
 import type { Asked } from './asked.ts';
 import { colours, letters, pens } from './ink.ts';
-import { label } from './label.ts';
+import { label, type LabelStyle } from './label.ts';
+import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 
@@ -15,6 +16,27 @@ export interface DimensionStyle {
   readonly halo?: boolean;
 }
 
+/** Room left free on either side of a figure in its line, px. */
+const CLEAR_PX = 4;
+
+/** Level line from one end to the other, broken where a figure stands in it; none where the figure takes all its stretch. */
+function lineRoundFigures(
+  places: readonly number[],
+  y: number,
+  figures: readonly string[],
+  { size = letters.drawing, weight = 400 }: DimensionStyle,
+): string {
+  const breaks = figures.map((figure, i) => {
+    const [from = 0, to = from] = [places[i], places[i + 1]];
+    const half = textWidth(figure, size, weight) / 2 + CLEAR_PX;
+    const middle = (from + to) / 2;
+    return 2 * half < to - from
+      ? `H${num(middle - half)}M${num(middle + half)},${num(y)}`
+      : `M${num(to)},${num(y)}`;
+  });
+  return `M${num(places[0] ?? 0)},${num(y)}${breaks.join('')}H${num(places.at(-1) ?? 0)}`;
+}
+
 /** Level dimension: thin line, oblique ticks, figure above. One figure for each stretch between neighbouring places, px. */
 export function dimensionChain(
   places: readonly number[],
@@ -22,7 +44,7 @@ export function dimensionChain(
   figures: readonly string[],
   style: DimensionStyle & {
     readonly boldest?: number;
-    /** Figure in the line instead of above it. */ readonly inLine?: boolean;
+    /** Figure in the line, which is broken for it, instead of above it. */ readonly inLine?: boolean;
     /** Which figures of the study they are, in the same order. */ readonly asked?: readonly Asked[];
   } = {},
 ): Piece {
@@ -32,7 +54,10 @@ export function dimensionChain(
   return g(
     {},
     el('path', {
-      d: `M${num(first)},${num(y)}H${num(last)}`,
+      d:
+        style.inLine === true
+          ? lineRoundFigures(places, y, figures, style)
+          : `M${num(first)},${num(y)}H${num(last)}`,
       stroke: colour,
       'stroke-width': pens.fine,
       fill: 'none',
@@ -58,13 +83,36 @@ export function dimensionChain(
   );
 }
 
-/** Upright dimension between two places, with its figure at the right or left. */
+/** A figure of a drawing with what it states. */
+export interface Figure {
+  readonly words: string;
+  readonly colour: string;
+  readonly asked: Asked;
+}
+
+/** A figure about a height y, or two, one under the other. */
+export const figureLines = (
+  x: number,
+  y: number,
+  [first, under]: readonly [Figure, Figure | undefined],
+  style: LabelStyle,
+): Piece[] => {
+  const line = (baseline: number, { words, colour, asked }: Figure): Piece =>
+    label(x, baseline, words, { ...style, fill: colour, figure: asked });
+  return under === undefined ? [line(y + 4, first)] : [line(y - 2, first), line(y + 10, under)];
+};
+
+/** Upright dimension between two places, with its figure at the right or left, and a second one under it where given. */
 export function uprightDimension(
   x: number,
   y0: number,
   y1: number,
-  figure: string,
-  style: DimensionStyle & { readonly side?: 'left' | 'right'; readonly asked?: Asked } = {},
+  words: string,
+  style: DimensionStyle & {
+    readonly side?: 'left' | 'right';
+    readonly asked?: Asked;
+    readonly under?: Figure | undefined;
+  } = {},
 ): Piece {
   const colour = style.colour ?? colours.ink;
   const left = style.side === 'left';
@@ -77,13 +125,11 @@ export function uprightDimension(
       fill: 'none',
     }),
     el('path', { d: tick(x, y0) + tick(x, y1), stroke: colour, 'stroke-width': pens.medium, fill: 'none' }),
-    label(x + (left ? -6 : 6), (y0 + y1) / 2 + 4, figure, {
+    figureLines(x + (left ? -6 : 6), (y0 + y1) / 2, [{ words, colour, asked: style.asked }, style.under], {
       anchor: left ? 'end' : 'start',
       size: style.size ?? letters.drawing,
       weight: style.weight ?? 400,
-      fill: colour,
       halo: style.halo !== false,
-      figure: style.asked,
     }),
   );
 }

@@ -19,12 +19,12 @@ export interface LevelMarkStyle {
 const half = 4.6;
 const height = 7.4;
 
-/** Room a level mark takes whose triangle stands at x, y px. */
+/** Room a level mark takes whose triangle stands at x, y px, down to the line it stands on. */
 export function levelMarkBox(x: number, y: number, text: string, side: 'left' | 'right'): Box {
   const width = textWidth(text, letters.drawing) + 6;
   return side === 'right'
-    ? { left: x - half, right: x + width + half, top: y - height - 11, bottom: y }
-    : { left: x - width - half, right: x + half, top: y - height - 11, bottom: y };
+    ? { left: x - half, right: x + width + 1, top: y - height - 11, bottom: y - 3 }
+    : { left: x - width - 1, right: x + half, top: y - height - 11, bottom: y - 3 };
 }
 
 /** Open triangle standing on a level, its figure on a shelf. */

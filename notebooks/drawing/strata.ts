@@ -19,6 +19,8 @@ export interface Stratum {
   readonly lowM: number;
   readonly highM: number;
   readonly words: string;
+  /** The same where there is less room. */
+  readonly short: string;
 }
 
 /** Bearing stratum of a stretch: its likeliest class, and how far the others lie above and below. */
@@ -33,8 +35,17 @@ export function stratumOf(stretch: GroundStretch): Stratum | null {
   const highM = Math.max(...levels);
   const spread = Math.max(highM - likely.bearingLevelM, likely.bearingLevelM - lowM);
   const assumed = stretch.known ? '' : ', assumed';
-  const words = `${names[likely.ground] ?? likely.ground}${assumed} ${level(likely.bearingLevelM)}${spread > 0.05 ? ` ± ${spread.toFixed(1)}` : ''}`;
-  return { fromM: stretch.fromM, toM: stretch.toM, likelyM: likely.bearingLevelM, lowM, highM, words };
+  const name = names[likely.ground] ?? likely.ground;
+  const at = `${level(likely.bearingLevelM)}${spread > 0.05 ? ` ± ${spread.toFixed(1)}` : ''}`;
+  return {
+    fromM: stretch.fromM,
+    toM: stretch.toM,
+    likelyM: likely.bearingLevelM,
+    lowM,
+    highM,
+    words: `${name}${assumed} ${at}`,
+    short: `${name} ${at}`,
+  };
 }
 
 /** Bearing strata: long dashes at the likeliest level, dots where the others put it. */

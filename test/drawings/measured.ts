@@ -36,6 +36,7 @@ import {
   readSvg,
   runsOf,
   within,
+  type Box,
   type Node,
 } from './measuring/svg.ts';
 
@@ -160,6 +161,8 @@ describe('crossing(input), measured', { timeout: 120_000 }, () => {
       if (readPaper(svg).scale > 2000) return;
       const paper = readPaper(svg);
       const marks = measureElevation(svg);
+      // A tick at each place; where the figures step aside for a support, drawn on to them.
+      const ticks = runsOf(band!.children.find(({ tag }) => tag === 'path')!);
       const rows = band!.children.filter(({ tag }) => tag === 'g').slice(1);
       const figures = new Map(
         rows.map((row) => {
@@ -172,7 +175,11 @@ describe('crossing(input), measured', { timeout: 120_000 }, () => {
       );
       const chainages = figures.get('ch')!;
       const start = chainagesOf(options[0]!)[0]!;
-      chainages.forEach(({ x, value }, i) => {
+      expect(ticks).toHaveLength(chainages.length);
+      chainages.forEach(({ x: writtenAt, value }, i) => {
+        const tick = ticks[i]!;
+        expect(tick.at(-1)![0]).toBeCloseTo(writtenAt, 1);
+        const [x] = tick[0]!;
         // Chainages are printed to the decimetre, levels to the centimetre.
         near(
           paper,
@@ -189,6 +196,26 @@ describe('crossing(input), measured', { timeout: 120_000 }, () => {
       });
     },
   );
+});
+
+describe('flags of a crossing', { timeout: 120_000 }, () => {
+  it.each(exampleNames)('keep off the piers and walls of every option of %s', (name) => {
+    const crossed = example(name);
+    for (const option of crossed.appraisal.options) {
+      const svg = crossingOf(crossed, option);
+      const standing = [...parts(svg, 'shaft'), ...parts(svg, 'wall')].map(boxOf);
+      for (const mark of having(svg, 'class', 'level-mark')) {
+        const [shelf, triangle] = mark.children.map(boxOf) as [Box, Box];
+        const words = mark.children.find(({ tag }) => tag === 'text')!.text;
+        expect(shelf.right - shelf.left).toBeGreaterThan(10);
+        const struck = standing.filter(
+          ({ left, right, top, bottom }) =>
+            left < shelf.right && right > shelf.left && top < triangle.bottom && bottom > shelf.top,
+        );
+        expect(struck, `option ${String(option.number)}, ${words}`).toEqual([]);
+      }
+    }
+  });
 });
 
 describe('section(input), measured', { timeout: 120_000 }, () => {
