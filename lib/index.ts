@@ -40,6 +40,7 @@ export { drawDrivers, drawRates, ratePacks, ratesFor } from './price/index.ts';
 export { depthBand, endRatioWindow, source, spanWindow, type Source } from './rules/index.ts';
 export {
   CROSSFALL,
+  abutmentWindows,
   constructionDepth,
   groundAt,
   roadLevelAt,

@@ -2,6 +2,7 @@
 export type * from '../lib/index.ts';
 export {
   PIER_HALF_WIDTH_M,
+  abutmentWindows,
   billParts,
   constructionDepth,
   families,

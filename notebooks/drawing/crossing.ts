@@ -27,12 +27,12 @@ import {
   depthHandle,
   freeBar,
   pierBays,
-  pierFeet,
-  pierHandles,
   spanChanges,
   spanFigures,
+  supportFeet,
+  supportHandles,
   type InHand,
-} from './pierHandles.ts';
+} from './supportHandles.ts';
 import { placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { el, g } from './piece.ts';
@@ -60,6 +60,18 @@ export interface CrossingInput {
   readonly handles?: InHand;
   readonly prefix?: string;
 }
+
+/**
+ * What a crossing on a sheet has room for: lettering with handles to take hold of, where a deck is more than a line, and a
+ * band of figures that do not stand too close.
+ */
+export const crossingHas = (
+  scale: Scale,
+  widthPx: number,
+): { readonly handles: boolean; readonly band: boolean } => ({
+  handles: scale < 2000,
+  band: scale <= 2000 && widthPx >= 700,
+});
 
 /** A span with what it has changed by where there is room for both; nothing where it would touch its neighbours. */
 function withChange(figure: string, change: string, spanM: number, frame: Frame, size: number): string {
@@ -137,8 +149,9 @@ export function crossing(input: CrossingInput): Piece {
   const paper = input.paper ?? 'colour';
   const prefix = input.prefix ?? 'crossing';
   const scale = input.scale ?? scaleOnSheet(site, widthPx);
-  const small = scale >= 2000;
-  const withBand = input.band ?? (scale <= 2000 && widthPx >= 700);
+  const has = crossingHas(scale, widthPx);
+  const small = !has.handles;
+  const withBand = input.band ?? has.band;
   const withBar = input.bar ?? true;
   const range = levelRange(site, option, !small);
   const shown = input.window ?? chainagesShown(site, widthPx, scale);
@@ -237,7 +250,7 @@ export function crossing(input: CrossingInput): Piece {
         option !== null && !small && barredPiers(site, option, frame, ink.accent),
         option !== null &&
           hands !== undefined && [
-            pierFeet(option, frame, bodyEnd + 6, hands.locked),
+            supportFeet(site, option, frame, bodyEnd + 6, hands.locked),
             freeBar(site, option, frame, bodyEnd + 14, hands.hold),
           ],
       ),
@@ -278,7 +291,7 @@ export function crossing(input: CrossingInput): Piece {
           pierBays(site, option, frame),
           spanFigures(option, frame, dimensionBottom - 8),
           depthHandle(site, option, frame, hands.hold),
-          pierHandles(option, frame, hands),
+          supportHandles(site, option, frame, hands),
         ],
       ],
       withBar &&

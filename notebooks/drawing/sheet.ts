@@ -2,8 +2,11 @@ import { colours, letters } from './ink.ts';
 import type { Child, Piece } from './piece.ts';
 import { el } from './piece.ts';
 
-/** The bundled lettering, with what stands in for it in a drawing opened elsewhere. */
-export const lettering = "'Overpass Variable', Overpass, 'DejaVu Sans', sans-serif";
+/**
+ * The bundled lettering, with what stands in for it where a program does not read the one in the file: faces that run a
+ * little narrower, so that lettering which was placed by the widths of the bundled one still keeps apart.
+ */
+export const lettering = "'Overpass Variable', Overpass, Arial, Helvetica, 'Liberation Sans', sans-serif";
 
 /**
  * A drawing where its sheet fits the room, px; else in a part that is pushed sideways, under the name `label`. `className`

@@ -9,7 +9,7 @@ import type { Frame } from './frame.ts';
 import type { Paper } from './ink.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
-import type { InHand } from './pierHandles.ts';
+import type { InHand } from './supportHandles.ts';
 import { el, g, num } from './piece.ts';
 import type { Scale } from './scale.ts';
 

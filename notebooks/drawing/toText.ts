@@ -40,9 +40,10 @@ export function toText(piece: Piece): string {
 
 /**
  * A drawing as a file of its own, in true size: width and height in millimetres of the sheet, so that 1:1000 prints as
- * 1:1000. Lettering falls back to a common sans serif where the reader has not the bundled one.
+ * 1:1000.
+ * @param faces rules of style that bring the lettering along
  */
-export function toSvgFile(piece: Piece): string {
+export function toSvgFile(piece: Piece, faces = ''): string {
   const mm = (px: string | undefined): string =>
     `${String(Math.round((Number(px ?? 0) * 25.4 * 1000) / 96) / 1000)}mm`;
   const alone: Piece = {
@@ -54,7 +55,7 @@ export function toSvgFile(piece: Piece): string {
       height: mm(piece.attrs['height']),
     },
     children: [
-      { tag: 'style', attrs: {}, children: ['text{font-variant-numeric:tabular-nums}'] },
+      { tag: 'style', attrs: {}, children: [`${faces}text{font-variant-numeric:tabular-nums}`] },
       ...piece.children,
     ],
   };

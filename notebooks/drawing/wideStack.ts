@@ -20,12 +20,12 @@ import {
   depthHandle,
   freeBar,
   pierBays,
-  pierFeet,
-  pierHandles,
   spanChanges,
   spanFigures,
+  supportFeet,
+  supportHandles,
   type InHand,
-} from './pierHandles.ts';
+} from './supportHandles.ts';
 import { scaleBar } from './scaleBar.ts';
 import { sheet } from './sheet.ts';
 import type { StackRow, StackSheet } from './stackSheet.ts';
@@ -213,7 +213,7 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
     ...drawn,
     figures(shared, option, bodyPx + 22, input.widthPx, figureY),
     shared.isTall && budgetLine(shared, figureY - 16, figureY + 26, false),
-    hands !== undefined && pierFeet(option, frame, dimensionY, hands.locked),
+    hands !== undefined && supportFeet(site, option, frame, dimensionY, hands.locked),
     hands !== undefined && freeBar(site, option, frame, dimensionY + 8, hands.hold),
   ];
   const taken =
@@ -223,7 +223,7 @@ function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyP
           pierBays(site, option, frame),
           spanFigures(option, frame, dimensionY - 8),
           depthHandle(site, option, frame, hands.hold),
-          pierHandles(option, frame, hands),
+          supportHandles(site, option, frame, hands),
         ];
   const piece = chosenRow(shared, option, top, height, children, taken);
   return { piece, bottom: top + height, frame };

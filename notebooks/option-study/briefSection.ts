@@ -1,5 +1,5 @@
-import type { Brief } from '../../lib/index.ts';
-import { crossing } from '../drawing/crossing.ts';
+import type { Brief, Site } from '../../lib/index.ts';
+import { crossing, crossingHas } from '../drawing/crossing.ts';
 import { sheetIn, wantsWidth } from '../drawing/elevation.ts';
 import { plan } from '../drawing/plan.ts';
 import { inRoom } from '../drawing/sheet.ts';
@@ -30,6 +30,10 @@ const presetNotes = ({ obstacles }: Brief): HtmlChild =>
       ),
     );
 
+/** What of the crossing can be taken hold of, and how. */
+const handWords = ({ windows }: Site): string =>
+  `Point at the drawing: piers, ${windows === undefined ? '' : 'abutments in their windows, '}soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier, Delete removes it, + in a span adds one.`;
+
 /** Section 1: the brief in prose, drawing and tables, each figure changed where it stands. */
 export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
   const { brief, books, site, reference, asItStands, hands } = cells;
@@ -52,20 +56,22 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
         room.widthPx,
         'Crossing',
       ),
-    notes: (v) => [
-      asItStandsNote(v.asItStands, v.books.currency),
-      h(
-        'p',
-        {},
-        'Point at the drawing: piers, soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier, Delete removes it, + in a span adds one.',
-      ),
-      h(
-        'p',
-        {},
-        'Last rows of the band: the lowest soffit that headroom, flood and freeboard allow, and what is spare.',
-      ),
-      h('p', { class: 'source' }, 'Founding shown for the likeliest ground of each stretch.'),
-    ],
+    notes: (v, room) => {
+      const { scale, widthPx } = sheetIn(v.site, room.widthPx);
+      const has = crossingHas(scale, widthPx);
+      return [
+        asItStandsNote(v.asItStands, v.books.currency),
+        has.handles && !room.isPaper && h('p', {}, handWords(v.site)),
+        has.band &&
+          h(
+            'p',
+            {},
+            'Last rows of the band: the lowest soffit that headroom, flood and freeboard allow, and what is spare.',
+          ),
+        has.handles &&
+          h('p', { class: 'source' }, 'Founding shown for the likeliest ground of each stretch.'),
+      ];
+    },
   });
   handsOn(crossingCell, studyDesk(graph, store, cells));
   return page.section(

@@ -40,7 +40,7 @@ export function byHand(
   });
   const said =
     kept === undefined
-      ? `${name}, the reference, stands as the search proposed it. Take hold of it in the stack: drag a pier or its soffit, or click a span and type; a double click between two piers adds one, a double click on a pier removes it. It then keeps your figures under its number.`
+      ? `${name}, the reference, stands as the search proposed it. Take hold of it in the stack: drag a pier, its soffit or an abutment that the brief leaves a window, or click a span and type; a double click between two piers adds one, a double click on a pier removes it. It then keeps your figures under its number.`
       : kept.depthM === null
         ? `${name}, the reference, is kept by hand: its supports stay where you put them, its depth is that of least cost.`
         : `${name}, the reference, is kept by hand: its supports stay where you put them, and its depth of ${level(kept.depthM)} m.`;

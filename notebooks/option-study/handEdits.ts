@@ -1,4 +1,13 @@
-import type { AppraisedOption, KeptOption, Study, Unit, Variant } from '../../lib/index.ts';
+import {
+  abutmentWindows,
+  PIER_HALF_WIDTH_M,
+  survey,
+  type AppraisedOption,
+  type KeptOption,
+  type Study,
+  type Unit,
+  type Variant,
+} from '../../lib/index.ts';
 import { fixed } from '../format.ts';
 import { supportName } from '../drawing/alongOption.ts';
 import { putAt } from '../page/place.ts';
@@ -53,6 +62,36 @@ export function withPier(study: Study, option: AppraisedOption, index: number, c
 export type Changed =
   | { readonly ok: true; readonly study: Study }
   | { readonly ok: false; readonly why: string };
+
+/** An end of the crossing. */
+type End = 'start' | 'end';
+
+/**
+ * The study with an abutment of an option moved to a chainage, m: inside the window that the brief leaves it, and short of
+ * the pier next to it.
+ */
+export function withAbutment(study: Study, option: AppraisedOption, end: End, chainageM: number): Changed {
+  const kept = keptOf(study, option);
+  const places = placesOf(kept.units);
+  const site = survey(study.brief);
+  const [fromM, toM] = abutmentWindows(site, PIER_HALF_WIDTH_M)[end];
+  if (!(toM > fromM))
+    return { ok: false, why: `the brief has it fixed: say there how far in the ${end} abutment may stand` };
+  if (!(chainageM >= fromM && chainageM <= toM)) {
+    const why = `between ${fixed(fromM, 1)} and ${fixed(toM, 1)} m: the window of the brief, as far as what has to pass stays out of the fill`;
+    return { ok: false, why };
+  }
+  const here = end === 'start' ? places[0]! : places.at(-1)!;
+  const next = end === 'start' ? places[1]! : places.at(-2)!;
+  if (!(Math.abs(next - chainageM) >= 1 && Math.sign(next - chainageM) === Math.sign(next - here))) {
+    const neighbour = supportName(places.indexOf(next), places.length);
+    return {
+      ok: false,
+      why: `at least ${fixed(1, 1)} m short of ${neighbour}, which stands at ${fixed(next, 1)}`,
+    };
+  }
+  return { ok: true, study: withKept(study, { ...kept, units: moved(kept.units, here, chainageM) }) };
+}
 
 /**
  * The study with a span of a given length, m: the support at its end moves, or the one at its start where that one is locked
@@ -128,35 +167,36 @@ export function withObstacleEdge(study: Study, index: number, end: 'from' | 'to'
   });
 }
 
-/** What a handle of a drawing moves, in words for undo, and the study with it moved; null for a handle nobody knows. */
-export function handEdit(
-  key: string,
-  option: AppraisedOption | null,
-): { readonly what: string; readonly put: (study: Study, value: number) => Study } | null {
+/** A change by hand: what it is in words for undo, and what comes of a value, m. */
+export interface HandEdit {
+  readonly what: string;
+  readonly put: (study: Study, value: number) => Changed;
+}
+
+const always = (what: string, put: (study: Study, value: number) => Study): HandEdit => ({
+  what,
+  put: (study, value) => ({ ok: true, study: put(study, value) }),
+});
+
+/** What a handle of a drawing changes; null for a handle nobody knows. */
+export function handEdit(key: string, option: AppraisedOption | null): HandEdit | null {
   const [kind, first = '', second = ''] = key.split('/');
   const index = Number(first);
-  if (kind === 'obstacle' && (second === 'from' || second === 'to')) {
-    return { what: 'edge of an obstacle', put: (study, at) => withObstacleEdge(study, index, second, at) };
-  }
+  if (kind === 'obstacle' && (second === 'from' || second === 'to'))
+    return always('edge of an obstacle', (study, at) => withObstacleEdge(study, index, second, at));
   if (kind === 'clearance') {
     const path = ['brief', 'obstacles', index, 'clearance', 'headroomM'];
-    return { what: 'headroom', put: (study, value) => putAt(study, path, value) };
+    return always('headroom', (study, value) => putAt(study, path, value));
   }
   if (kind === 'road') {
     const path = ['brief', 'road', first === 'start' ? 'startLevelM' : 'endLevelM'];
-    return { what: 'road level', put: (study, value) => putAt(study, path, value) };
+    return always('road level', (study, value) => putAt(study, path, value));
   }
   if (option === null) return null;
-  if (kind === 'pier') {
-    return { what: 'moving a pier', put: (study, at) => withPier(study, option, index, at) };
-  }
-  if (kind === 'depth') return { what: 'depth', put: (study, value) => withDepth(study, option, value) };
-  if (kind === 'span') {
-    const put = (study: Study, value: number): Study => {
-      const typed = withSpan(study, option, index, value);
-      return typed.ok ? typed.study : study;
-    };
-    return { what: 'span', put };
-  }
+  if (kind === 'pier') return always('moving a pier', (study, at) => withPier(study, option, index, at));
+  if (kind === 'depth') return always('depth', (study, value) => withDepth(study, option, value));
+  if (kind === 'abutment' && (first === 'start' || first === 'end'))
+    return { what: 'moving an abutment', put: (study, at) => withAbutment(study, option, first, at) };
+  if (kind === 'span') return { what: 'span', put: (study, value) => withSpan(study, option, index, value) };
   return null;
 }

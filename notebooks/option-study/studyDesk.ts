@@ -1,8 +1,8 @@
-import type { AppraisedOption } from '../../lib/index.ts';
+import type { AppraisedOption, Study } from '../../lib/index.ts';
 import { supportChainages } from '../drawing/alongOption.ts';
 import type { HandDesk, StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
-import { handEdit, keptOf, withLock, withSpan, type Changed } from './handEdits.ts';
+import { handEdit, keptOf, withLock, type Changed } from './handEdits.ts';
 import { withPierAdded, withPierRemoved, withSpanParted } from './pierCount.ts';
 import type { StudyCells } from './studyCells.ts';
 
@@ -27,14 +27,17 @@ export function studyDesk(graph: Graph, store: StudyStore, cells: StudyCells): H
     const [of, index] = key.split('/');
     return of === kind ? Number(index) : NaN;
   };
-  /** Makes a change to the reference in one step of undo; says why it cannot be made, or null. */
-  const change = (what: string, by: (held: AppraisedOption) => Changed): string | null => {
-    const held = now();
-    if (held === null) return 'there is no option to change';
-    const changed = by(held);
+  /** Makes a change in one step of undo; says why it cannot be made, or null. */
+  const make = (what: string, changed: Changed): string | null => {
     if (!changed.ok) return changed.why;
     store.edit(() => changed.study, { what });
     return null;
+  };
+  const NOTHING = 'there is no option to change';
+  /** The same to the reference. */
+  const change = (what: string, by: (held: AppraisedOption) => Changed): string | null => {
+    const held = now();
+    return held === null ? NOTHING : make(what, by(held));
   };
   return {
     take(key, valueM) {
@@ -44,18 +47,15 @@ export function studyDesk(graph: Graph, store: StudyStore, cells: StudyCells): H
     move(key, value) {
       const edit = handEdit(key, option);
       if (edit === null) return;
-      store.edit((study) => edit.put(study, value), { coalesce: `hand.${key}`, what: edit.what });
+      const moved = (study: Study): Study => {
+        const changed = edit.put(study, value);
+        return changed.ok ? changed.study : study;
+      };
+      store.edit(moved, { coalesce: `hand.${key}`, what: edit.what });
     },
     type(key, value) {
-      const held = now();
-      const edit = handEdit(key, held);
-      if (edit === null) return 'there is no option to change';
-      if (key.startsWith('span/') && held !== null) {
-        const typed = withSpan(store.valid(), held, Number(key.slice(5)), value);
-        if (!typed.ok) return typed.why;
-      }
-      store.edit((study) => edit.put(study, value), { what: edit.what });
-      return null;
+      const edit = handEdit(key, now());
+      return edit === null ? NOTHING : make(edit.what, edit.put(store.valid(), value));
     },
     add: (bay, at) =>
       change('adding a pier', (held) =>

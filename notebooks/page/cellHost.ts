@@ -75,8 +75,8 @@ export interface CellHost {
   readonly state: () => StationState;
   /** Begins to show: call once the element stands in the page. */
   readonly begin: () => void;
-  /** Draws for paper of the given body width, or for the screen again. */
-  readonly setPaper: (room: Room | null) => void;
+  /** Draws for a room of its own, as on paper, or for that on the screen again. */
+  readonly setRoom: (room: Room | null) => void;
   readonly end: () => void;
 }
 
@@ -142,7 +142,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   /** Its size has changed, and with it the places of the stations below. */
   let isResized = false;
   const awaited = new Map<Cell<unknown>, State<unknown>>();
-  let paper: Room | null = null;
+  /** Room it is drawn for instead of that on the screen. */
+  let given: Room | null = null;
   const stops: (() => void)[] = [];
 
   /** What failed: its own values, or something they are made from by and by. */
@@ -170,11 +171,11 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   const draw = (): void => {
     // Off the screen its width may never have been observed.
     if (!isNear) bodyPx ||= body.clientWidth;
-    const widthPx = paper?.widthPx ?? bodyPx;
+    const widthPx = given?.widthPx ?? bodyPx;
     const values = 'value' in state ? state.value : undefined;
     if (values === undefined || widthPx === 0) return;
     if (typeof spec.wide === 'function') element.classList.toggle('wide', spec.wide(values));
-    const room = { widthPx, isPaper: paper !== null };
+    const room = { widthPx, isPaper: given?.isPaper === true };
     const isSame =
       drawn?.values === values && drawn.room.widthPx === widthPx && drawn.room.isPaper === room.isPaper;
     if (!isOwed && isSame) return;
@@ -225,14 +226,14 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
 
   /** The time belongs to what is seen: the rest is drawn when the page has nothing better to do, and on paper. */
   const update = (): void => {
-    if (isNear || paper !== null) return drawAndSay();
+    if (isNear || given !== null) return drawAndSay();
     page.rests.put(drawAndSay, place);
     if (element.dataset['state'] !== stationState()) saySoFar();
   };
   const drawAndSay = (): void => {
     page.rests.drop(drawAndSay);
     draw();
-    if (!isNear && paper === null) page.drawnUnseen(element);
+    if (!isNear && given === null) page.drawnUnseen(element);
     late.set(isWaiting());
     saySoFar();
   };
@@ -311,8 +312,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
         () => page.rests.drop(drawAndSay),
       );
     },
-    setPaper(room) {
-      paper = room;
+    setRoom(room) {
+      given = room;
       updateSoon();
     },
     end() {

@@ -3,6 +3,7 @@ import { pieceOf } from '../drawing/toDom.ts';
 import { toSvgFile } from '../drawing/toText.ts';
 import { h } from '../html.ts';
 import { saveFile } from './files.ts';
+import { lettersInFile } from './lettersInFile.ts';
 import { printDrawing } from './printDrawing.ts';
 
 /** Parts of a drawing that are for the hand and not for paper. */
@@ -39,12 +40,11 @@ function drawnIn(cell: Element): Piece[] {
   });
 }
 
-function saveDrawings(cell: Element): void {
-  const pieces = drawnIn(cell);
-  pieces.forEach((piece, i) => {
+async function saveDrawings(cell: Element, pieces: readonly Piece[]): Promise<void> {
+  for (const [i, piece] of pieces.entries()) {
     const name = `${nameOf(cell)}${pieces.length > 1 ? `-${String(i + 1)}` : ''}`;
-    saveFile(`${name}.svg`, toSvgFile(piece), 'image/svg+xml');
-  });
+    saveFile(`${name}.svg`, toSvgFile(piece, await lettersInFile(piece)), 'image/svg+xml');
+  }
 }
 
 const action = (words: string, of: string, act: () => void): HTMLElement =>
@@ -58,16 +58,22 @@ const action = (words: string, of: string, act: () => void): HTMLElement =>
  * The line under a cell with drawings: saves them as SVG in true size, or prints them alone on A4 or Letter. Hidden while
  * the cell has none.
  * @param heading what is printed over a drawing besides the name of its cell, e.g. the title of the study
+ * @param onFullSheet has the cell drawn as on a full sheet while something is taken from it
  */
-export function drawingActions(cell: HTMLElement, heading: () => string): HTMLElement {
+export function drawingActions(
+  cell: HTMLElement,
+  heading: () => string,
+  onFullSheet: (take: () => Piece[]) => Piece[],
+): HTMLElement {
   const of = cell.getAttribute('aria-label') ?? '';
+  const pieces = (): Piece[] => onFullSheet(() => drawnIn(cell));
   const print = (paper: 'A4' | 'Letter') => (): void =>
-    printDrawing(drawnIn(cell), { paper, heading: [heading(), of] });
+    printDrawing(pieces(), { paper, heading: [heading(), of] });
   return h(
     'p',
     { class: 'drawing-actions' },
     'Drawing: ',
-    action('save as SVG', of, () => saveDrawings(cell)),
+    action('save as SVG', of, () => void saveDrawings(cell, pieces())),
     action('print on A4', of, print('A4')),
     action('on Letter', of, print('Letter')),
   );

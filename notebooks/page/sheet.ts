@@ -1,7 +1,7 @@
 import { h } from '../html.ts';
 import type { HtmlChild } from '../html.ts';
 import type { Cell, Graph, State, Uses, Values } from '../reactive/index.ts';
-import type { CellHost, CellSpec, Explained } from './cellHost.ts';
+import type { CellHost, CellSpec, Explained, Room } from './cellHost.ts';
 import { cellHost } from './cellHost.ts';
 import { exchange } from './exchange.ts';
 import { frames, screenFrames } from './frames.ts';
@@ -69,8 +69,13 @@ export interface Sheet {
   readonly end: () => void;
 }
 
-/** Body and wide body of the printed sheet, px: 980 px are 259 m at 1:1000. */
-const PAPER = { body: 980, wide: 1224 } as const;
+/** Body and wide body of the full sheet, px, as it is printed: 980 px are 259 m at 1:1000. */
+const FULL = { body: 980, wide: 1224 } as const;
+
+const fullRoom = ({ element }: CellHost, isPaper: boolean): Room => ({
+  widthPx: element.classList.contains('wide') ? FULL.wide : FULL.body,
+  isPaper,
+});
 
 /** Whether everything has been drawn is asked again after so long, ms. */
 const SKIP_ASK_MS = 300;
@@ -158,12 +163,20 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
 
   const onPaper = (isPaper: boolean) => (): void => {
     lines.setPaper(isPaper);
-    for (const host of hosts()) {
-      const wide = host.element.classList.contains('wide');
-      host.setPaper(isPaper ? { widthPx: wide ? PAPER.wide : PAPER.body, isPaper } : null);
-    }
+    for (const host of hosts()) host.setRoom(isPaper ? fullRoom(host, isPaper) : null);
     queue.flush();
   };
+  /** Takes something from a cell as it is drawn on the full sheet, however narrow the screen. */
+  const onFullSheet =
+    (host: CellHost) =>
+    <T>(take: () => T): T => {
+      host.setRoom(fullRoom(host, false));
+      queue.flush();
+      const taken = take();
+      host.setRoom(null);
+      queue.flush();
+      return taken;
+    };
 
   return {
     live(uses, show) {
@@ -220,8 +233,10 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
         lines.upright,
       );
       const heading = (): string => element.querySelector('h1')?.textContent ?? '';
-      for (const { element: cell } of hosts())
-        cell.querySelector(':scope > .body')?.after(drawingActions(cell, heading));
+      for (const host of hosts()) {
+        const { element: cell } = host;
+        cell.querySelector(':scope > .body')?.after(drawingActions(cell, heading, onFullSheet(host)));
+      }
       root.append(element);
       sizes = heights(
         sections.map((section) => section.element),

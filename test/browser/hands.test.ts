@@ -291,3 +291,59 @@ describe('by hand', () => {
     );
   });
 });
+
+describe('an abutment with a window', () => {
+  beforeAll(async () => {
+    const study = exampleOf(['composite-i']) as { brief: { crossing: object } };
+    const crossing = { ...study.brief.crossing, endEarliestM: 1452 };
+    await openAsFile(page, { ...study, brief: { ...study.brief, crossing } });
+    await page.waitForSelector(`${CROSSING} [data-handle="abutment/end"]`, { state: 'attached' });
+    await settled(page);
+  });
+
+  it('is dragged; spans, road and cost follow, and it is one step of undo', async () => {
+    expect(await handle('abutment/start').count()).toBe(0);
+    const before = await valueOf('abutment/end');
+    const said = await textOf(`${CROSSING} .notes`);
+    const to = before > 1460 ? -20 : 20;
+    await pull('abutment/end', to, 0);
+    await changed('abutment/end', before);
+    await page.waitForSelector(`${CROSSING} .free path`);
+    expect(await textOf(`${CROSSING} svg`)).toMatch(/\([+−]\d+\.\d\)/u);
+    await page.waitForFunction(
+      ([place, words]) => document.querySelector(place!)?.textContent !== words,
+      [`${CROSSING} .notes`, said],
+    );
+    await page.mouse.up();
+    await settled(page);
+    const after = await valueOf('abutment/end');
+    expect(Math.sign(after - before)).toBe(Math.sign(to));
+    expect((await textOf(`${CROSSING} .band`)).replace(/\u2009/gu, '')).toContain(String(after));
+    await undoIs('Undo moving an abutment');
+    await page.getByRole('button', { name: 'Undo', exact: true }).click();
+    await settled(page);
+    expect(await valueOf('abutment/end')).toBe(before);
+    expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+  });
+
+  it('is stepped with the arrow keys as far as its window goes, and refused beyond with the window', async () => {
+    await handle('abutment/end').focus();
+    for (let step = 0; step < 5; step += 1) await page.keyboard.press('Shift+ArrowLeft');
+    await page.waitForFunction(
+      (selector) => document.querySelector(selector)?.getAttribute('aria-valuenow') === '1452',
+      `${CROSSING} [data-handle="abutment/end"]`,
+    );
+    await page.keyboard.press('Enter');
+    await page.keyboard.press('Enter');
+    await page.keyboard.type('1440');
+    await page.keyboard.press('Enter');
+    await page.waitForFunction(
+      (place) => document.querySelector(place)?.textContent.includes('refused, between 1\u2009452.0 and'),
+      `${CROSSING} .hand-said`,
+    );
+    expect(await valueOf('abutment/end')).toBe(1452);
+    await handle('abutment/end').focus();
+    await page.keyboard.press('Delete');
+    expect(await textOf(`${CROSSING} .hand-said`)).toContain('only a pier can be removed');
+  });
+});

@@ -130,6 +130,11 @@ describe('a drawing', () => {
     expect(scale).toBe(1000);
     expect(text).not.toContain('data-handle');
     expect(text).toContain('1:1000 at A3');
+    // Lettered as on the page wherever it is opened: upright, and italic for names of waters.
+    const faces = text.match(
+      /@font-face \{[^}]*src: url\("data:font\/woff2;base64,[\w+/=]{20000,}"\)[^}]*\}/gu,
+    )!;
+    expect(faces.map((face) => /font-style: (\w+)/u.exec(face)![1])).toEqual(['normal', 'italic']);
   });
 
   it('is printed alone, on A4 at its scale and on Letter too; a stack is cut between its rows', async () => {
@@ -140,6 +145,7 @@ describe('a drawing', () => {
           words: sheet.querySelector('p')!.textContent,
           width: Number(sheet.querySelector('svg')!.getAttribute('width')),
           height: Number(sheet.querySelector('svg')!.getAttribute('height')),
+          texts: [...sheet.querySelectorAll('svg text')].map((text) => text.textContent),
         }));
         (window as unknown as { printed: unknown[] }).printed.push(parts);
         dispatchEvent(new Event('afterprint'));
@@ -174,5 +180,26 @@ describe('a drawing', () => {
     expect(printed[2]![0]!.words).toMatch(/part 1 of \d; about 1:\d+ on A4, reduced from 1:1000/u);
     for (const { height } of printed[2]!) expect(height).toBeLessThanOrEqual(((210 - 24) / 25.4) * 96 - 40);
     expect(await page.locator('.alone-print').count()).toBe(0);
+  });
+
+  it('goes on paper as on a full sheet from a narrow screen, and no hand is spoken of there', async () => {
+    await page.setViewportSize({ width: 400, height: 800 });
+    const cell = page.locator('[id="1+020"]');
+    const drawn = () => cell.locator('svg.drawing').first().getAttribute('width');
+    await page.waitForFunction(
+      () => Number(document.querySelector('[id="1+020"] svg.drawing')!.getAttribute('width')) < 400,
+    );
+    const before = await drawn();
+    expect(await cell.locator('svg .band').count()).toBe(0);
+    await cell.getByRole('button', { name: /^print on A4/u }).click();
+    const onPaper = await page.evaluate(() =>
+      (window as unknown as { printed: { words: string; texts: string[] }[][] }).printed.at(-1)!,
+    );
+    expect(onPaper[0]!.words).toContain('1:1000 on A4');
+    expect(onPaper[0]!.texts).toContain('spare');
+    expect(await drawn()).toBe(before);
+    await page.evaluate(() => dispatchEvent(new Event('beforeprint')));
+    expect(await cell.locator('.notes').textContent()).not.toContain('dragged');
+    await page.evaluate(() => dispatchEvent(new Event('afterprint')));
   });
 });

@@ -4,6 +4,7 @@ import {
   handEdit,
   keptOf,
   released,
+  withAbutment,
   withDepth,
   withLock,
   withObstacleEdge,
@@ -135,9 +136,62 @@ describe('withSpan(study, option, span, lengthM)', () => {
   });
 });
 
+describe('withAbutment(study, option, end, chainageM)', () => {
+  const { crossing } = numbered.brief;
+  const windowed = (window: object): Study => ({
+    ...numbered,
+    brief: { ...numbered.brief, crossing: { ...crossing, ...window } },
+  });
+  const endM = crossing.endM;
+  const open = windowed({ endEarliestM: endM - 25 });
+  const said = (study: Study, end: 'start' | 'end', at: number): string => {
+    const changed = withAbutment(study, option, end, at);
+    return changed.ok ? 'moved' : changed.why;
+  };
+
+  it('moves it in its window with the option kept, and the spans and the length follow', () => {
+    const changed = withAbutment(open, option, 'end', endM - 10);
+    if (!changed.ok) throw new Error(changed.why);
+    expect(placesOf(changed.study)).toEqual([...start.slice(0, -1), endM - 10]);
+    expect(changed.study.options.reference).toBe(option.number);
+    const now = appraiseKept(changed.study, option, kept).option!;
+    expect(now.supports.at(-1)!.chainageM).toBe(endM - 10);
+    expect(now.endM).toBe(endM - 10);
+    // A shorter bridge carries a longer fill.
+    expect(now.profile).not.toEqual(option.profile);
+  });
+
+  it('refuses a place outside the window, with the window', () => {
+    expect(said(open, 'end', endM - 30)).toContain('between 1\u2009445.0 and 1\u2009470.0 m');
+    expect(said(open, 'end', endM + 1)).toContain('the window of the brief');
+    expect(said(open, 'end', NaN)).toContain('the window of the brief');
+  });
+
+  it('lets no fill bury what has to pass, however wide the window', () => {
+    const wide = windowed({ startLatestM: 1300 });
+    const [first] = numbered.brief.obstacles.map(({ fromM }) => fromM).sort((a, b) => a - b);
+    expect(said(wide, 'start', first! - 2)).toBe('moved');
+    expect(said(wide, 'start', first! - 1)).toContain('stays out of the fill');
+  });
+
+  it('stops short of the pier next to it', () => {
+    const wide = windowed({ endEarliestM: start.at(-2)! - 5 });
+    const why = said(wide, 'end', start.at(-2)! + 0.5);
+    expect(why).toMatch(/^at least 1\.0 m short of P\d, which stands at /u);
+  });
+
+  it('says where an abutment that the brief has fixed is freed', () => {
+    expect(said(open, 'start', crossing.startM)).toContain('the brief has it fixed');
+  });
+});
+
 describe('handEdit(key, option)', () => {
   it('moves edges, headroom and road levels of the brief', () => {
-    const put = (key: string, value: number): Study => handEdit(key, option)!.put(numbered, value);
+    const put = (key: string, value: number): Study => {
+      const changed = handEdit(key, option)!.put(numbered, value);
+      if (!changed.ok) throw new Error(changed.why);
+      return changed.study;
+    };
     expect(put('road/start', 21.3).brief.road.startLevelM).toBe(21.3);
     expect(put('road/end', 18.1).brief.road.endLevelM).toBe(18.1);
     const index = numbered.brief.obstacles.findIndex(({ clearance }) => clearance !== null);

@@ -1,5 +1,6 @@
 import { fixed, level } from '../format.ts';
 import type { AppraisedOption, Site } from '../model.ts';
+import { PIER_HALF_WIDTH_M, abutmentWindows } from '../model.ts';
 import {
   groundLevel,
   placedUnits,
@@ -10,7 +11,7 @@ import {
   supportName,
 } from './alongOption.ts';
 import type { Frame } from './frame.ts';
-import { barredAt, freeStretches } from './freeStretches.ts';
+import { barredAt, freeStretches, type Stretch } from './freeStretches.ts';
 import { handle, typedFigure } from './handle.ts';
 import type { Hold } from './hold.ts';
 import { colours, letters, pens } from './ink.ts';
@@ -29,27 +30,45 @@ export interface InHand {
   readonly locked: readonly number[];
 }
 
-/** Where a pier may go between its neighbours, m. */
-function roomOf(at: readonly number[], index: number): { readonly fromM: number; readonly toM: number } {
+/** Key of the handle of a support: piers by their number, abutments by their end. */
+const keyOf = (index: number, last: number): string =>
+  index === 0 ? 'abutment/start' : index === last ? 'abutment/end' : `pier/${String(index)}`;
+
+/**
+ * Where a support may go, m: a pier between its neighbours, an abutment in its window and short of the first pier; null for
+ * an abutment that the brief has fixed.
+ */
+function roomOf(site: Site, at: readonly number[], index: number): Stretch | null {
+  const last = at.length - 1;
   const here = at[index] ?? NaN;
-  return {
-    fromM: Math.min(here, (at[index - 1] ?? here) + APART_M),
-    toM: Math.max(here, (at[index + 1] ?? here) - APART_M),
-  };
+  const fromM = Math.min(here, (at[index - 1] ?? -Infinity) + APART_M);
+  const toM = Math.max(here, (at[index + 1] ?? Infinity) - APART_M);
+  if (index > 0 && index < last) return { fromM, toM };
+  if (site.windows === undefined) return null;
+  const { start, end } = abutmentWindows(site, PIER_HALF_WIDTH_M);
+  const window = index === 0 ? start : end;
+  if (window[1] - window[0] < APART_M / 2) return null;
+  return index === 0
+    ? { fromM: window[0], toM: Math.min(window[1], toM) }
+    : { fromM: Math.max(window[0], fromM), toM: window[1] };
 }
 
-/** Handles of the piers, halfway up the shaft; abutments do not move. In hand: the old place dashed. */
-export function pierHandles(option: AppraisedOption, frame: Frame, { hold, locked }: InHand): Piece {
+/** Handles of the supports that may move, piers halfway up the shaft. In hand: the old place dashed. */
+export function supportHandles(
+  site: Site,
+  option: AppraisedOption,
+  frame: Frame,
+  { hold, locked }: InHand,
+): Piece {
   const at = supportChainages(option);
-  const last = at.length - 1;
   return g(
     { class: 'handles' },
     at.map((chainageM, index) => {
-      if (index === 0 || index === last || chainageM < frame.fromM || chainageM > frame.toM) return null;
+      if (chainageM < frame.fromM || chainageM > frame.toM) return null;
       const support = option.supports.find((one) => Math.abs(one.chainageM - chainageM) < 0.06);
-      if (support === undefined) return null;
-      const room = roomOf(at, index);
-      const key = `pier/${String(index)}`;
+      const room = roomOf(site, at, index);
+      if (support === undefined || room === null) return null;
+      const key = keyOf(index, at.length - 1);
       const [top, foot] = [frame.y(support.topLevelM), frame.y(support.groundLevelM)];
       const isLocked = locked.includes(index);
       return handle(
@@ -79,14 +98,21 @@ export function pierHandles(option: AppraisedOption, frame: Frame, { hold, locke
   );
 }
 
-/** At the foot of each pier a circle where it is free to move, a solid triangle where it is locked. */
-export function pierFeet(option: AppraisedOption, frame: Frame, y: number, locked: readonly number[]): Piece {
+/** Below each support a circle where it is free to move, a solid triangle where it is locked; nothing where it is fixed. */
+export function supportFeet(
+  site: Site,
+  option: AppraisedOption,
+  frame: Frame,
+  y: number,
+  locked: readonly number[],
+): Piece {
   const at = supportChainages(option);
   return g(
     { class: 'feet' },
-    at.slice(1, -1).map((chainageM, i) => {
+    at.map((chainageM, index) => {
+      if (roomOf(site, at, index) === null) return null;
       const x = frame.x(chainageM);
-      return locked.includes(i + 1)
+      return locked.includes(index)
         ? el('path', { d: `M${num(x)},${num(y - 4.6)}l4.4,7.6h-8.8Z`, fill: colours.ink })
         : el('circle', {
             cx: x,
@@ -100,7 +126,7 @@ export function pierFeet(option: AppraisedOption, frame: Frame, y: number, locke
   );
 }
 
-/** Where the pier in hand may stand: a heavy bar for each free stretch, what is barred left out. */
+/** Where the support in hand may stand: a heavy bar for each free stretch, what is barred left out. */
 export function freeBar(
   site: Site,
   option: AppraisedOption,
@@ -108,12 +134,13 @@ export function freeBar(
   y: number,
   hold: Hold | null,
 ): Piece | null {
-  const index = hold?.key.startsWith('pier/') === true ? Number(hold.key.slice(5)) : NaN;
   const at = supportChainages(option);
-  if (at[index] === undefined) return null;
+  const index = at.findIndex((_, i) => keyOf(i, at.length - 1) === hold?.key);
+  const room = index < 0 ? null : roomOf(site, at, index);
+  if (room === null) return null;
   return g(
     { class: 'free' },
-    freeStretches(site, roomOf(at, index)).map(({ fromM, toM }) =>
+    freeStretches(site, room).map(({ fromM, toM }) =>
       el('path', {
         d: `M${num(frame.x(fromM))},${num(y - 3)}v6M${num(frame.x(fromM))},${num(y)}H${num(frame.x(toM))}M${num(frame.x(toM))},${num(y - 3)}v6`,
         fill: 'none',
