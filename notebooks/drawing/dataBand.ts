@@ -56,16 +56,18 @@ function bandChainages(
   const tens: number[] = [];
   for (let x = Math.ceil(site.startM / 10) * 10; x <= site.endM; x += 10) tens.push(x);
   const widthOf = (at: number): number => Math.max(pitch, textWidth(chainage(at), letters.drawing, 600) + 5);
-  const taken: { readonly at: number; readonly x: number }[] = [];
+  const taken: { readonly at: number; readonly x: number; readonly widthPx: number }[] = [];
   const [least, most] = [frame.left + nameRoom + 14, frame.right - 16];
   const take = (at: number, isEnd = false, asidePx = 0): boolean => {
     const home = frame.x(at) + asidePx;
     // Figures of an abutment at the edge of the sheet step inside: they say their chainage.
     const x = isEnd ? Math.max(least, Math.min(most, home)) : home;
     if (at < frame.fromM || at > frame.toM || x < least || x > most) return false;
-    const room = (other: number): number => (widthOf(at) + widthOf(other)) / 2;
-    if (taken.some((other) => Math.abs(other.x - x) < room(other.at))) return false;
-    taken.push({ at, x });
+    const near = taken.filter((other) => Math.abs(other.x - x) < 2 * pitch);
+    if (near.some((other) => Math.abs(other.x - x) < pitch)) return false;
+    const widthPx = widthOf(at);
+    if (near.some((other) => Math.abs(other.x - x) < (widthPx + other.widthPx) / 2)) return false;
+    taken.push({ at, x, widthPx });
     return true;
   };
   const supports = option === null ? [site.startM, site.endM] : supportChainages(option);

@@ -17,7 +17,7 @@ async function asDataUrl(address: URL): Promise<string> {
   const blob = await (await fetch(address)).blob();
   return new Promise((resolve, reject) => {
     const reader = new FileReader();
-    reader.addEventListener('load', () => resolve(String(reader.result)));
+    reader.addEventListener('load', () => resolve(reader.result as string));
     reader.addEventListener('error', () => reject(reader.error ?? new Error('the lettering cannot be read')));
     reader.readAsDataURL(blob);
   });
