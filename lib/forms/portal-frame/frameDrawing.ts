@@ -92,5 +92,5 @@ export function frameSections(model: FrameModel, tendons: FrameTendons | null): 
       ],
     };
   };
-  return [cut('midspan', task.spansM[0]! / 2, middles[0]!), cut('wall', legTopM / 2, knees[0] + 1)];
+  return [cut('midspan', task.spansM[0]! / 2, middles[0]!), cut('face of wall', legTopM / 2, knees[0] + 1)];
 }
