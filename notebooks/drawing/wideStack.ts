@@ -233,15 +233,17 @@ function axisHead(shared: StackSheet, y: number, right: number): Piece {
   const { axis, input, unit } = shared;
   // A figure under the line of the budget could not be read.
   const limit = input.budget === null ? NaN : axis.x(input.budget);
+  const unitPx = textWidth(unit.label, letters.drawing);
+  const unitAt = limit > right - unitPx - 5 && limit < right + 5 ? limit - 5 : right;
   return g(
     { class: 'axis' },
     axis.ticks.map(
       (tick) =>
-        axis.x(tick) < right - 26 &&
+        axis.x(tick) < unitAt - 26 &&
         !(Math.abs(axis.x(tick) - limit) < 9) &&
         label(axis.x(tick), y, String(tick / unit.per), { anchor: 'middle', fill: colours.second }),
     ),
-    label(right, y, unit.label, { anchor: 'end', fill: colours.second }),
+    label(unitAt, y, unit.label, { anchor: 'end', fill: colours.second }),
   );
 }
 

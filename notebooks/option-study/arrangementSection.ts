@@ -119,7 +119,8 @@ export function arrangementSection(
         h(
           'p',
           {},
-          'Click an elevation to make it the reference everywhere. Grey bands are barred to supports. All stand on one chainage and one scale.',
+          h('span', { class: 'on-screen' }, 'Click an elevation to make it the reference everywhere. '),
+          'Grey bands are barred to supports. All stand on one chainage and one scale.',
         ),
       ],
     }),

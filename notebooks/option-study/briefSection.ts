@@ -30,6 +30,9 @@ const presetNotes = ({ obstacles }: Brief): HtmlChild =>
       ),
     );
 
+/** Of what is said beside a cell: how its figures are changed, which paper need not say. */
+const onScreen = { class: 'on-screen' };
+
 /** What of the crossing can be taken hold of, and how. */
 const handWords = ({ windows }: Site): string =>
   `Point at the drawing: piers, ${windows === undefined ? '' : 'abutments in their windows, '}soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier, Delete removes it, + in a span adds one.`;
@@ -91,7 +94,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
             'Plain underline: typed here. Dotted: preset, to be confirmed. Dashed: unknown, and the result is wider for it.',
           ),
           presetNotes(v.brief),
-          h('p', {}, 'Drag a figure sideways, use the arrow keys, or type; ? for not known.'),
+          h('p', onScreen, 'Drag a figure sideways, use the arrow keys, or type; ? for not known.'),
         ],
       }),
       crossingCell,
@@ -134,7 +137,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
           h('p', {}, 'An envelope is a preset until its authority has confirmed it.'),
           h(
             'p',
-            {},
+            onScreen,
             'Ground line: paste chainage and level from a spreadsheet into any of its figures; they take its place.',
           ),
         ],
@@ -148,7 +151,12 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
           h(
             'p',
             {},
-            'Looking up-chainage. Click a width to change it, a name to change what the strip is, a gap to add one.',
+            'Looking up-chainage. ',
+            h(
+              'span',
+              onScreen,
+              'Click a width to change it, a name to change what the strip is, a gap to add one.',
+            ),
           ),
           h('p', {}, 'Each class of ground gets its own foundation and its own price; the odds mix them.'),
           h('p', { class: 'source' }, `${groundNames()}.`),

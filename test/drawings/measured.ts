@@ -18,6 +18,7 @@ import { section } from '../../notebooks/drawing/section.ts';
 import { roadProfile } from '../../notebooks/drawing/roadProfile.ts';
 import { stack, stackChainage } from '../../notebooks/drawing/stack.ts';
 import { mainDesign } from '../../notebooks/drawing/sectionRow.ts';
+import { textWidth } from '../../notebooks/drawing/lettering.ts';
 import { toSvgFile } from '../../notebooks/drawing/toText.ts';
 import { expectGolden } from './golden.ts';
 import { crossedBy, example, type Crossed } from './measuring/crossings.ts';
@@ -331,6 +332,21 @@ describe('stack(input) of a long crossing', { timeout: 120_000 }, () => {
       const decks = having(body, 'data-form').flatMap((unit) => having(unit, 'data-part'));
       const beside = decks.map(boxOf).filter(({ right }) => right > 980);
       expect(Math.min(...beside.map(({ top }) => top))).toBeGreaterThan(lowest);
+    }
+  });
+});
+
+describe('stack(input) beside its costs', { timeout: 120_000 }, () => {
+  it('writes the unit of its axis clear of the line of a budget that stands at the end of it', () => {
+    const { site, options, standing } = example('low-ferry').appraisal;
+    const most = Math.max(...options.map(({ cost }) => cost.p90));
+    const drawing = { site, options, standing, currency: 'EUR', reference: null, widthPx: 1224 };
+    for (const budget of [0.9 * most, most, 1.2 * most]) {
+      const svg = file(stack({ ...drawing, budget }));
+      const [line] = having(svg, 'class', 'budget')[0]!.children.map(boxOf);
+      const unit = having(svg, 'class', 'axis')[0]!.children.find(({ text }) => text === 'M€')!;
+      const right = Number(unit.attrs['x']);
+      expect(line!.left < right - textWidth('M€', 11) - 2 || line!.left > right + 2).toBe(true);
     }
   });
 });
