@@ -52,7 +52,7 @@ function lastAtMost(X: Float64Array, x: number): number {
 }
 
 function backwards(costs: SupportCosts): SupportCosts {
-  return { knots: costs.knots, C: costs.C.map((column) => Float64Array.from(column).reverse()) };
+  return { knots: costs.knots, C: costs.C.map((column) => column.slice().reverse()) };
 }
 
 /** Approaches read from the far abutment, with indices turned round so that they rise again. */

@@ -225,7 +225,7 @@ export function heaviestPiece(model: GirderModel, girder: SizedGirder): { length
   const pieces = Math.max(1, Math.ceil(model.lengthM / compositeData.pieceLengthM.value - 1e-9));
   const lengthM = model.lengthM / pieces;
   const { elementM } = model;
-  const kg = Float64Array.from(elementM, (_, e) => 7.85 * steelArea(platesAt(girder.run, e)));
+  const kg = elementM.map((_, e) => 7.85 * steelArea(platesAt(girder.run, e)));
   let most = 0;
   let start = 0;
   for (let p = 0; p < pieces; p++) {

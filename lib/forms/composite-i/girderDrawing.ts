@@ -18,7 +18,7 @@ export function girderElevation(model: GirderModel, run: PlateRun): Shape[] {
     deckFace('girder', 'steel', soffit, model.slab.rootM),
   ];
   let x = 0;
-  const startOf = Float64Array.from(model.elementM, (length) => {
+  const startOf = model.elementM.map((length) => {
     const start = x;
     x += length;
     return start;

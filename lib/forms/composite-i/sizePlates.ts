@@ -16,7 +16,7 @@ export function designShear(model: GirderModel, effects: GirderEffects): Float64
   const { uls } = model.standard.factors;
   const { steelStage, superimposed, shrinkage, traffic } = effects;
   const slant = model.plate?.slant ?? 1;
-  return Float64Array.from(model.elementM, (_, e) => {
+  return model.elementM.map((_, e) => {
     const torsion = model.plate?.torsionKN[e] ?? 0;
     const right =
       uls.permanent * steelStage.shearRightKN[e]! +
@@ -52,7 +52,7 @@ export function webCapacityKN(model: GirderModel, e: number, webM: number, heigh
 export function sizeWeb(model: GirderModel, run: PlateRun, shearKN: Float64Array): Float64Array {
   const { web, bendingShear } = compositeData;
   const rolled = plateThicknessesMm.map((mm) => mm / 1000).filter((t) => t <= web.mostMm.value / 1000);
-  const need = Float64Array.from(shearKN, (v, e) => {
+  const need = shearKN.map((v, e) => {
     const height = run.heightM[e]! - run.topM[e]! - run.bottomM[e]!;
     const longM = height * (model.plate?.slant ?? 1);
     const least = Math.max(web.leastMm[model.standardId] / 1000, longM / mostWebSlenderness(model, height));

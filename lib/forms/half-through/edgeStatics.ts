@@ -78,7 +78,7 @@ export function edgeDemand(c: EdgeCase, statics: EdgeStatics, loads: EdgeLoads):
     hogKNm: unit.momentKNm.map(
       (m, i) => (m < 0 ? adverse : helping) * m + uls.traffic * traffic.momentMinKNm[i]!,
     ),
-    shearKN: Float64Array.from(c.elementM, (_, e) =>
+    shearKN: c.elementM.map((_, e) =>
       Math.max(shear(unit.shearRightKN[e]!, e), shear(unit.shearLeftKN[e + 1]!, e + 1)),
     ),
   };

@@ -162,7 +162,7 @@ function firstPlates(c: EdgeCase, heightM: number, demand: EdgeDemand): Plates {
   const fy = c.yieldMPa(0.05) * 1000;
   const most = Math.max(...demand.sagKNm, ...demand.hogKNm.map(Math.abs));
   const widthM = flangeWidth(c, most / (0.9 * heightM * fy));
-  const t = Float64Array.from(c.elementM, (_, e) => {
+  const t = c.elementM.map((_, e) => {
     const moment = Math.max(
       demand.sagKNm[e]!,
       demand.sagKNm[e + 1]!,
@@ -196,7 +196,7 @@ function flangeWidth(c: EdgeCase, areaM2: number): number {
 function webs(c: EdgeCase, choice: EdgeChoice, plates: Plates, shearKN: Float64Array): Float64Array {
   const { web } = halfThroughData;
   const rolled = plateThicknessesMm.map((mm) => mm / 1000).filter((t) => t <= web.mostMm / 1000);
-  const need = Float64Array.from(shearKN, (v, e) => {
+  const need = shearKN.map((v, e) => {
     const height = choice.heightM - plates.topM[e]! - plates.bottomM[e]!;
     const least = Math.max(web.leastMm / 1000, height / web.mostHeightOverThickness);
     const spacing = spacingAt(c, choice, e);

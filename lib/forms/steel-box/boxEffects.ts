@@ -170,7 +170,7 @@ function designShear(
   traffic: TrafficEnvelope,
 ): Float64Array {
   const { uls } = standard.factors;
-  return Float64Array.from(elementM, (_, e) => {
+  return elementM.map((_, e) => {
     const right = uls.permanent * own.shearRightKN[e]! + uls.superimposed * superimposed.shearRightKN[e]!;
     const left =
       uls.permanent * own.shearLeftKN[e + 1]! + uls.superimposed * superimposed.shearLeftKN[e + 1]!;

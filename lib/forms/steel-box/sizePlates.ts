@@ -52,7 +52,7 @@ export function sizeWebs(model: SteelBoxModel, effects: BoxEffects, plates: BoxP
   const thinnest = launchKN > 0 ? Math.min(...plates.bottomM) : 0;
   const elements = model.elementM.length;
   const half = model.symmetrical ? Math.ceil(elements / 2) : elements;
-  const need = Float64Array.from(model.elementM, (_, e) => {
+  const need = model.elementM.map((_, e) => {
     if (e >= half) return leastM;
     const shear = webShearKN(model, effects, e);
     return (

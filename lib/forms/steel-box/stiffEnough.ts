@@ -25,7 +25,7 @@ export function stiffEnough(
 ): Flanges {
   const nowM4 = inertias(model, now);
   const strongM4 = inertias(model, strong);
-  const wantedM4 = Float64Array.from(strongM4);
+  const wantedM4 = strongM4.slice();
   const leastShare = Math.min(...strongM4.map((m4, e) => m4 / nowM4[e]!));
   // The span that gives most first: what stiffens it stiffens its neighbours too.
   const spans = effects.deflections.map((ratio, span) => ({ ratio, span })).sort((a, b) => b.ratio - a.ratio);
@@ -51,8 +51,8 @@ export function stiffEnough(
     wantedM4.set(work.map((_, e) => stiffened(high, e)));
   }
   if (wantedM4.every((wanted, e) => wanted <= noticeable * strongM4[e]!)) return strong;
-  const deckM = Float64Array.from(strong.deckM);
-  const bottomM = Float64Array.from(strong.bottomM);
+  const deckM = strong.deckM.slice();
+  const bottomM = strong.bottomM.slice();
   wantedM4.forEach((wanted, e) => {
     if (wanted > noticeable * strongM4[e]!) thicken(model, strong, e, wanted, deckM, bottomM);
   });

@@ -68,16 +68,19 @@ export function effectsOf(beam: LineBeam, loading: Loading): Effects {
     deflectionM[e] = w0;
     deflectionM[e + 1] = w1;
   }
-  const reactionKN = Float64Array.from(
-    beam.supportAt,
-    (i) => shearRightKN[i]! - shearLeftKN[i]! + (stationKN ? stationKN[i]! : 0),
-  );
-  const springKN = Float64Array.from(beam.springAt, (i, s) => beam.springKNPerM[s]! * deflectionM[i]!);
+  const reactionKN = new Float64Array(beam.supportAt.length);
+  beam.supportAt.forEach((i, j) => {
+    reactionKN[j] = shearRightKN[i]! - shearLeftKN[i]! + (stationKN ? stationKN[i]! : 0);
+  });
+  const springKN = new Float64Array(beam.springAt.length);
+  beam.springAt.forEach((i, s) => {
+    springKN[s] = beam.springKNPerM[s]! * deflectionM[i]!;
+  });
   return { momentKNm, shearLeftKN, shearRightKN, reactionKN, springKN, deflectionM };
 }
 
 function settleSupports(beam: LineBeam, settlementM: readonly number[], u: Float64Array): void {
-  const before = Float64Array.from(u);
+  const before = u.slice();
   for (let j = 0; j < beam.supportAt.length; j++) {
     const value = settlementM[j] ?? 0;
     if (value !== 0) prescribe(beam, beam.fixed[j]!, value, u);

@@ -36,7 +36,7 @@ function addLoadShear(line: Float64Array, station: number): void {
 /** Element line of the moment at a station, kNm per kN. */
 export function momentLine(beam: LineBeam, station: number): Float64Array {
   const { xM } = beam;
-  const line = beam.startMomentLine ? Float64Array.from(beam.startMomentLine) : emptyLine(beam);
+  const line = beam.startMomentLine ? beam.startMomentLine.slice() : emptyLine(beam);
   sources(beam).forEach((at, j) => {
     if (at < station) addLine(line, xM[station]! - xM[at]!, reactionLines(beam)[j]!);
   });

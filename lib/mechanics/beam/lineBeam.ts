@@ -58,7 +58,7 @@ export function lineBeam(geometry: BeamGeometry): LineBeam {
   const fixed = mesh.supportAt.map((station) => freedoms.w[station]!);
   if (geometry.fixedEnds?.start) fixed.push(freedoms.right[0]!);
   if (geometry.fixedEnds?.end) fixed.push(freedoms.left[n - 1]!);
-  const factors = Float64Array.from(stiffness);
+  const factors = stiffness.slice();
   for (const freedom of fixed) isolate(factors, freedoms.count, freedom);
   if (factorBand(factors, freedoms.count) >= 0) {
     throw new RangeError('hinges: expected a beam that stands, received a mechanism; remove a hinge');

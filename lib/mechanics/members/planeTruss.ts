@@ -97,7 +97,7 @@ export function trussForces(truss: PlaneTruss, loads: readonly NodeLoad[]): Trus
     b[2 * load.node]! += load.xKN ?? 0;
     b[2 * load.node + 1]! -= load.zKN ?? 0;
   }
-  const applied = Float64Array.from(b);
+  const applied = b.slice();
   for (const row of truss.held) b[row] = 0;
   solveSkyline(truss.factors, b);
   const memberKN = new Float64Array(members.length);
