@@ -2,6 +2,7 @@ import { readdirSync } from 'node:fs';
 import { resolve } from 'node:path';
 import { runnerImport, type Plugin } from 'vite';
 import { defineConfig } from 'vitest/config';
+import { BaseSequencer, type TestSpecification } from 'vitest/node';
 
 const root = import.meta.dirname;
 const pages = readdirSync(resolve(root, 'notebooks'))
@@ -39,6 +40,28 @@ const workedAnswers: Plugin = {
   },
 };
 
+/** Tests that take longest, the longest first: what begins late keeps a processor waiting at the end. */
+const longest = [
+  'oracles/arrangePipeline',
+  'properties/arrange',
+  'examples',
+  'explain/manual',
+  'appraise/abutmentWindows',
+  'appraise/memory',
+  'appraise/appraise',
+  'properties/road',
+].map((name) => resolve(root, `test/${name}.test.ts`));
+
+class LongestFirst extends BaseSequencer {
+  override async sort(files: TestSpecification[]): Promise<TestSpecification[]> {
+    const rank = ({ moduleId }: TestSpecification): number => {
+      const at = longest.indexOf(moduleId);
+      return at < 0 ? longest.length : at;
+    };
+    return (await super.sort(files)).sort((a, b) => rank(a) - rank(b));
+  }
+}
+
 export default defineConfig({
   root: resolve(root, 'notebooks'),
   base: './',
@@ -57,6 +80,7 @@ export default defineConfig({
   server: { fs: { allow: [root] } },
   test: {
     root,
+    sequence: { sequencer: LongestFirst },
     benchmark: { include: ['test/bench/**/*.bench.ts'] },
     projects: [
       {
