@@ -105,8 +105,6 @@ export default defineConfig({
           root,
           include: ['test/browser/**/*.test.ts'],
           fileParallelism: false,
-          // One browser and its opened studies serve all files.
-          isolate: false,
           testTimeout: 60_000,
           hookTimeout: 60_000,
         },

@@ -14,7 +14,7 @@ import { join, resolve } from 'node:path';
 import type { Page } from 'playwright-core';
 import { build } from 'vite';
 import { exampleNames } from '../../notebooks/examples.ts';
-import { openAlone } from '../browser/site.ts';
+import { openSite } from '../browser/site.ts';
 
 /** What one drag came to. */
 interface Drag {
@@ -205,7 +205,7 @@ const asked = process.argv.slice(2);
 const outDir = mkdtempSync(join(tmpdir(), 'spanledger-'));
 const configFile = resolve(import.meta.dirname, '../../vite.config.ts');
 await build({ configFile, logLevel: 'silent', build: { outDir } });
-const site = await openAlone(outDir);
+const site = await openSite(outDir);
 try {
   for (const example of asked.length > 0 ? asked : exampleNames) {
     const { page, heard } = await site.open('about:blank');

@@ -1,17 +1,19 @@
 import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
-import type { Locator, Page } from 'playwright-core';
+import { chromium } from 'playwright-core';
+import type { Browser, Locator, Page } from 'playwright-core';
 import { build, preview } from 'vite';
 import type { PreviewServer } from 'vite';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import { findChromium } from '../../.config/chromium.mjs';
 import type { Trial } from './pages/page.ts';
-import { sharedBrowser } from './site.ts';
 
 const root = resolve(import.meta.dirname, '../..');
 /** The trial page is built: served file by file it takes seconds to load before each test. */
 const outDir = mkdtempSync(join(tmpdir(), 'page-'));
 let server: PreviewServer;
+let browser: Browser;
 let page: Page;
 
 beforeAll(async () => {
@@ -35,11 +37,15 @@ beforeAll(async () => {
     build: { outDir },
     preview: { port: 0, host: '127.0.0.1' },
   });
-  page = await (await sharedBrowser()).newPage({ viewport: { width: 1440, height: 900 } });
+  browser = await chromium.launch({
+    executablePath: await findChromium(),
+    args: ['--no-sandbox', '--disable-gpu'],
+  });
+  page = await browser.newPage({ viewport: { width: 1440, height: 900 } });
 });
 
 afterAll(async () => {
-  await page.close();
+  await browser.close();
   await server.close();
   rmSync(outDir, { recursive: true, force: true });
 });

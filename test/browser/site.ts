@@ -31,22 +31,8 @@ const quiet = [
   '--disable-sync',
 ];
 
-/** A browser and a server of the built site for all files of a process: starting them takes seconds. They end with the process. */
-let started: Promise<{ readonly browser: Browser; readonly address: string }> | undefined;
-
-/** The browser that all tests share. */
-export async function sharedBrowser(): Promise<Browser> {
-  return (await start()).browser;
-}
-
-function start(): NonNullable<typeof started> {
-  return (started ??= launch(resolve(root, 'dist')).then(({ browser, address }) => ({ browser, address })));
-}
-
-/** Serves a built site, building it where nobody has yet, and starts a browser. */
-async function launch(
-  outDir: string,
-): Promise<{ readonly browser: Browser; readonly address: string; readonly close: () => Promise<void> }> {
+/** Serves the built site (building it where nobody has yet), or one built elsewhere, and starts the browser. */
+export async function openSite(outDir = resolve(root, 'dist')): Promise<Site> {
   if (!existsSync(resolve(outDir, 'option-study.html'))) {
     await build({ configFile, logLevel: 'silent', build: { outDir } });
   }
@@ -56,30 +42,8 @@ async function launch(
     build: { outDir },
     preview: { host: '127.0.0.1', port: 0 },
   });
-  const browser = await chromium.launch({ executablePath: await findChromium(), args: quiet });
-  return {
-    browser,
-    address: server.resolvedUrls!.local[0]!,
-    close: async () => {
-      await browser.close();
-      await server.close();
-    },
-  };
-}
-
-/** Opens the built site in the browser that all tests share. */
-export async function openSite(): Promise<Site> {
-  const { browser, address } = await start();
-  return siteAt(address, browser);
-}
-
-/** Opens a site built elsewhere in a browser of its own. */
-export async function openAlone(outDir: string): Promise<Site> {
-  const { browser, address, close } = await launch(outDir);
-  return { ...siteAt(address, browser), close };
-}
-
-function siteAt(address: string, browser: Browser): Site {
+  const address = server.resolvedUrls!.local[0]!;
+  const browser: Browser = await chromium.launch({ executablePath: await findChromium(), args: quiet });
   let last: BrowserContext | undefined;
   return {
     address,
@@ -99,7 +63,8 @@ function siteAt(address: string, browser: Browser): Site {
       return { page, heard };
     },
     async close() {
-      await last?.close();
+      await browser.close();
+      await server.close();
     },
   };
 }

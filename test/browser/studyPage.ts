@@ -1,7 +1,7 @@
 import type { Locator, Page } from 'playwright-core';
-import { afterEach, beforeAll, expect } from 'vitest';
+import { afterAll, afterEach, beforeAll, expect } from 'vitest';
 import example from '../../data/examples/low-ferry.json' with { type: 'json' };
-import { openSite, type Heard } from './site.ts';
+import { openSite, type Heard, type Site } from './site.ts';
 
 /** A cell says only after 150 ms that it waits: what is seen before that may be of the study before. */
 const SAYS_SO_MS = 250;
@@ -64,45 +64,33 @@ export async function openAsFile(page: Page, study: object): Promise<void> {
   await (await chooser).setFiles({ name: 'study.json', mimeType: 'application/json', buffer });
 }
 
-interface StudyPage {
-  readonly page: Page;
-  readonly heard: Heard;
-}
-
-/** Pages of the process by the study on them: opening one and working it out takes seconds. */
-const opened = new Map<string, Promise<StudyPage>>();
-
-async function openStudyPage(study: object | undefined): Promise<StudyPage> {
-  const site = await openSite();
-  const { page, heard } = await site.open('option-study.html');
-  if (study !== undefined) {
-    await openAsFile(page, study);
-    await page.waitForURL(/study=/u);
-  }
-  await settled(page);
-  return { page, heard };
-}
-
 /**
- * The option study, or a study of a test's own, opened once for all tests of all files that ask for it. After each test
- * everything it changed is taken back, and the page must have been silent.
+ * Opens the option study, or a study of a test's own, once for all tests of a file, for working it out takes seconds. After
+ * each test everything it changed is taken back, and the page must have been silent.
  */
 export function oneStudyPage(study?: object): { readonly page: Page } {
-  let ours: StudyPage;
+  let site: Site;
+  let page: Page;
+  let heard: Heard;
   beforeAll(async () => {
-    const key = study === undefined ? 'example' : JSON.stringify(study);
-    if (!opened.has(key)) opened.set(key, openStudyPage(study));
-    ours = await opened.get(key)!;
-    await ours.page.bringToFront();
+    site = await openSite();
+    ({ page, heard } = await site.open('option-study.html'));
+    if (study !== undefined) {
+      // What the page works out of its example meanwhile is given up.
+      await openAsFile(page, study);
+      await page.waitForURL(/study=/u);
+    }
+    await settled(page);
   });
   afterEach(async () => {
-    await takeBack(ours.page);
-    await settled(ours.page);
-    silent(ours.heard);
+    await takeBack(page);
+    await settled(page);
+    silent(heard);
   });
+  afterAll(() => site.close());
   return {
     get page() {
-      return ours.page;
+      return page;
     },
   };
 }

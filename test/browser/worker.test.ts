@@ -1,12 +1,14 @@
 import { resolve } from 'node:path';
-import type { Page } from 'playwright-core';
+import { chromium } from 'playwright-core';
+import type { Browser, Page } from 'playwright-core';
 import { createServer } from 'vite';
 import type { ViteDevServer } from 'vite';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { findChromium } from '../../.config/chromium.mjs';
 import type { ask } from './pages/worker.ts';
-import { sharedBrowser } from './site.ts';
 
 let server: ViteDevServer;
+let browser: Browser;
 let page: Page;
 
 beforeAll(async () => {
@@ -18,13 +20,17 @@ beforeAll(async () => {
     server: { port: 0, host: '127.0.0.1' },
   });
   await server.listen();
-  page = await (await sharedBrowser()).newPage();
+  browser = await chromium.launch({
+    executablePath: await findChromium(),
+    args: ['--no-sandbox', '--disable-gpu'],
+  });
+  page = await browser.newPage();
   await page.goto(new URL('/test/browser/pages/worker.html', server.resolvedUrls!.local[0]).href);
   await page.waitForFunction(() => 'ask' in window);
 });
 
 afterAll(async () => {
-  await page.close();
+  await browser.close();
   await server.close();
 });
 
