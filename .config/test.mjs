@@ -1,6 +1,6 @@
 // npm test: install when needed, types, lint, unit (layer rules among them) and published checks, browser; ends with a plain count.
 import { spawn } from 'node:child_process';
-import { mkdirSync, readFileSync } from 'node:fs';
+import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
 import { resolve } from 'node:path';
 import { fail, install, root, runTogether } from './install.mjs';
 
@@ -12,6 +12,8 @@ const chromium = await findChromium();
 /** Runs the tests of one project; what it says is held back until it has ended, so that two do not talk at once. */
 function runProject(project) {
   const file = resolve(root, `.cache/${project}.json`);
+  // What an earlier run has left must not speak for this one.
+  rmSync(file, { force: true });
   const args = ['run', '--project', project, '--reporter=dot', '--reporter=json'];
   return new Promise((ended) => {
     const runner = resolve(root, 'node_modules/vitest/vitest.mjs');
@@ -27,6 +29,7 @@ function runProject(project) {
     child.on('error', ({ message }) => fail(`vitest could not be started: ${message}`));
     child.on('close', (code) => {
       process.stdout.write(Buffer.concat(said));
+      if (!existsSync(file)) fail(`The ${project} tests ended without a result (code ${code}).`);
       const { numPassedTests: passed, numFailedTests: failed } = JSON.parse(readFileSync(file, 'utf8'));
       ended({ passed, failed, broken: code !== 0 });
     });

@@ -43,7 +43,7 @@ export function kindOf(placed: readonly PlacedUnit[]): number {
 }
 
 /** Turns placed units into chainages, rising whichever end the frame counts from. */
-export function unitsOf(frame: Frame, placed: readonly PlacedUnit[]): Unit[] {
+function unitsOf(frame: Frame, placed: readonly PlacedUnit[]): Unit[] {
   const units = placed.map((unit): Unit => {
     const supportsM = unit.at.map((i) => chainageOf(frame, frame.X[i]!));
     const { form, role, pylons } = unit;

@@ -37,13 +37,14 @@ async function withData({ face, base }: { face: CSSFontFaceRule; base: string })
 export async function lettersInFile(drawing: Piece): Promise<string> {
   const styles = uses(drawing, 'font-style', 'italic') ? ['normal', 'italic'] : ['normal'];
   const family = drawing.attrs['font-family'] ?? '';
-  const needed = facesOfPage().filter(
-    ({ face: { style } }) =>
-      styles.includes(style.getPropertyValue('font-style')) &&
-      family.startsWith(`'${style.getPropertyValue('font-family').replace(/["']/gu, '')}'`),
-  );
-  return Promise.all(needed.map(withData)).then(
-    (rules) => rules.join(''),
-    () => '',
-  );
+  try {
+    const needed = facesOfPage().filter(
+      ({ face: { style } }) =>
+        styles.includes(style.getPropertyValue('font-style')) &&
+        family.startsWith(`'${style.getPropertyValue('font-family').replace(/["']/gu, '')}'`),
+    );
+    return (await Promise.all(needed.map(withData))).join('');
+  } catch {
+    return '';
+  }
 }

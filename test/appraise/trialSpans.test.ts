@@ -1,10 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { formModule } from '../../lib/forms/index.ts';
-import { workbench, type MeasuredLine, type Study, type Workbench } from '../../lib/index.ts';
+import { workbench, type MeasuredLine, type Workbench } from '../../lib/index.ts';
 import { meanClearance } from '../../lib/appraise/meanClearance.ts';
 import { trialSpans } from '../../lib/appraise/trialSpans.ts';
 import { methodLines } from '../../lib/takeoff/index.ts';
-import { lowFerry } from './studies.ts';
+import { levelCrossing } from './levelCrossing.ts';
 
 describe('trialSpans()', () => {
   it('goes from end to end by even ratios where nothing leaps', () => {
@@ -30,34 +30,11 @@ describe('trialSpans()', () => {
 });
 
 describe('cost table of portal frames of two spans', () => {
-  /** A level crossing over dry ground. */
-  const over = (lengthM: number): Study => {
-    const { brief, ...study } = lowFerry();
-    return {
-      ...study,
-      brief: {
-        ...brief,
-        crossing: {
-          ...brief.crossing,
-          startM: 100,
-          endM: 100 + lengthM,
-          ground: [60, 240].map((chainageM) => ({ chainageM, levelM: 10 })),
-        },
-        road: { ...brief.road, startLevelM: 16.5, endLevelM: 16.5 },
-        obstacles: [],
-        waters: [],
-        groundStretches: brief.groundStretches
-          .slice(0, 1)
-          .map((stretch) => ({ ...stretch, fromM: 60, toM: 240 })),
-      },
-    };
-  };
-
   const benches = new Map<number, Workbench>();
 
   /** By the table, and as sized at its depth: all but what is measured with piers. */
   function both(lengthM: number, share: number): { readonly table: number; readonly sized: number } {
-    const bench = benches.get(lengthM) ?? workbench(over(lengthM));
+    const bench = benches.get(lengthM) ?? workbench(levelCrossing(lengthM));
     benches.set(lengthM, bench);
     const { site, size, costOf, tables } = bench;
     const table = tables.tableFor({ form: 'portal-frame', method: 'falsework' });

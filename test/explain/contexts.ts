@@ -1,5 +1,6 @@
 import type { KeptOption, Study, Variant } from '../../lib/index.ts';
 import type { Context } from '../../lib/explain/index.ts';
+import { levelCrossing } from '../appraise/levelCrossing.ts';
 import { lowFerry } from '../appraise/studies.ts';
 import { answerTo } from '../appraise/answerTo.ts';
 
@@ -119,22 +120,12 @@ export const inFlood = (): Context =>
 /** A short road bridge as a portal frame, no water about: walls in one with the deck instead of abutments. */
 export const frame = (): Context =>
   once('frame', () => {
-    const study = lowFerry();
+    const study = levelCrossing(24);
     const { brief, books, options } = study;
     return {
       ...study,
       brief: {
         ...brief,
-        crossing: {
-          ...brief.crossing,
-          startM: 100,
-          endM: 124,
-          ground: [
-            { chainageM: 60, levelM: 10 },
-            { chainageM: 180, levelM: 10 },
-          ],
-        },
-        road: { ...brief.road, startLevelM: 16.5, endLevelM: 16.5 },
         obstacles: [
           {
             kind: 'road',
@@ -146,10 +137,6 @@ export const frame = (): Context =>
             clearance: { fromM: 108, toM: 116, datumLevelM: 10.1, headroomM: 5, confirmed: true },
           },
         ],
-        waters: [],
-        groundStretches: brief.groundStretches
-          .slice(0, 1)
-          .map((stretch) => ({ ...stretch, fromM: 60, toM: 180 })),
       },
       books: { ...books, draws: 1000 },
       options: { ...options, forms: ['portal-frame'], workOutAnyway: [] },

@@ -5,13 +5,28 @@ import { portalData } from './portalData.ts';
 
 type Parasitic = readonly ChainEffects[] | null;
 
+/** What stands beside every accident: permanent loads, fill with its least or at rest and prestress, all with a factor of 1. */
+function standing(model: FrameModel, parasitic: Parasitic, k: number): Action[] {
+  const { own, superimposed, earth } = model.cases[k]!;
+  const { activePressure, restPressure } = portalData.earth;
+  return [
+    [[own, 1]],
+    [[superimposed, 1]],
+    [
+      [earth, activePressure],
+      [earth, restPressure],
+    ],
+    ...(parasitic ? [[[parasitic[k]!, 1]] satisfies Action] : []),
+  ];
+}
+
 /**
- * A wall struck, on stiff and on soft feet: permanent loads, fill with its least or at rest, prestress and the usual share of
- * temperature with the force either way, all with a factor of 1, without traffic (EN 1990 6.4.3.3, from memory; the share of
- * temperature that is there most of the time is that of the frequent one, table A2.1).
+ * A wall struck either way, on stiff and on soft feet, beside what stands and the usual share of temperature, without traffic
+ * (EN 1990 6.4.3.3, from memory; the share of temperature that is there most of the time is that of the frequent one, table
+ * A2.1).
  */
 function struckCombinations(model: FrameModel, traffic: FrameTraffic, parasitic: Parasitic): Combination[] {
-  const { earth, temperature, service, cracked } = portalData;
+  const { temperature, service, cracked } = portalData;
   const warm = service.frequentTemperature * (model.prestressed ? 1 : cracked.share);
   const perK = temperature.expansion1PerK / 1e-5;
   return model.cases.flatMap((one, k) =>
@@ -20,12 +35,7 @@ function struckCombinations(model: FrameModel, traffic: FrameTraffic, parasitic:
       braking: one.braking,
       shares: [],
       actions: [
-        [[one.own, 1]],
-        [[one.superimposed, 1]],
-        [
-          [one.earth, earth.activePressure],
-          [one.earth, earth.restPressure],
-        ],
+        ...standing(model, parasitic, k),
         [
           [one.longer, warm * perK * temperature.warmerK],
           [one.longer, -warm * perK * temperature.colderK],
@@ -34,45 +44,33 @@ function struckCombinations(model: FrameModel, traffic: FrameTraffic, parasitic:
           [one.topWarmer, warm * temperature.topWarmerK],
           [one.topWarmer, -warm * temperature.topCoolerK],
         ],
-        [
-          [strike, 1],
-          [strike, -1],
-        ],
-        ...(parasitic ? [[[parasitic[k]!, 1]] satisfies Action] : []),
+        eitherWay(strike, 1),
       ],
     })),
   );
 }
 
 /**
- * An earthquake along the road either way, on stiff and on soft feet: permanent loads, fill with its least or at rest and
- * prestress, all with a factor of 1, without traffic and without imposed movements (EN 1990 6.4.3.4 and EN 1998-2 5.5, from
- * memory). The fill does not hold the frame back. At rest it presses as hard as active fill that is shaken by 0.2 g, three
- * quarters of the acceleration added to its coefficient (Seed and Whitman 1970, from memory): harder shaking adds nothing here.
+ * An earthquake along the road either way, on stiff and on soft feet, beside what stands, without traffic and without imposed
+ * movements (EN 1990 6.4.3.4 and EN 1998-2 5.5, from memory). The fill does not hold the frame back. At rest it presses as
+ * hard as active fill that is shaken by 0.2 g, three quarters of the acceleration added to its coefficient (Seed and Whitman
+ * 1970, from memory): harder shaking adds nothing here, and a rule says so.
  */
 function quakeCombinations(model: FrameModel, traffic: FrameTraffic, parasitic: Parasitic): Combination[] {
   const { quakeShare = 0 } = model.task;
   if (!(quakeShare > 0)) return [];
-  const { activePressure, restPressure } = portalData.earth;
   return model.cases.map((one, k) => ({
     traffic: traffic.cases[k]!,
     braking: one.braking,
     shares: [],
-    actions: [
-      [[one.own, 1]],
-      [[one.superimposed, 1]],
-      [
-        [one.earth, activePressure],
-        [one.earth, restPressure],
-      ],
-      [
-        [one.weightAlong, quakeShare],
-        [one.weightAlong, -quakeShare],
-      ],
-      ...(parasitic ? [[[parasitic[k]!, 1]] satisfies Action] : []),
-    ],
+    actions: [...standing(model, parasitic, k), eitherWay(one.weightAlong, quakeShare)],
   }));
 }
+
+const eitherWay = (effects: ChainEffects, factor: number): Action => [
+  [effects, factor],
+  [effects, -factor],
+];
 
 /**
  * All that a frame has to be strong for: the ultimate limit state, its walls struck, an earthquake.
