@@ -117,7 +117,7 @@ export function ranking(input: RankingInput): Piece {
           el(
             'td',
             {
-              class: 'fig',
+              class: 'fig spans',
               'data-figure': dataFigure(spanPaths(option).filter((path) => path !== undefined)),
             },
             spansText(spansOf(option)),

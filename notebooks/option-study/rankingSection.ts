@@ -3,6 +3,7 @@ import { ranking } from '../charts/ranking.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
 import { fixed } from '../format.ts';
+import { formLooks } from '../forms/formLook.ts';
 import { h, type HtmlChild } from '../html.ts';
 import { pushed, workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
@@ -78,7 +79,10 @@ export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
         ),
       notes: (v) => [
         v.appraisal.standing.because.slice(1).map((words) => h('p', {}, words)),
-        v.appraisal.dropped.map(({ form, because }) => h('p', {}, `${form} dropped: ${because.join('; ')}.`)),
+        v.appraisal.dropped.map(({ form, option, because }) => {
+          const of = option === undefined ? '' : `Option ${String(option)}, `;
+          return h('p', {}, `${of}${formLooks[form].short} dropped: ${because.join('; ')}.`);
+        }),
       ],
     }),
     page.cell({
