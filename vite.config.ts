@@ -104,6 +104,7 @@ export default defineConfig({
           name: 'browser',
           root,
           include: ['test/browser/**/*.test.ts'],
+          isolate: false,
           fileParallelism: false,
           testTimeout: 60_000,
           hookTimeout: 60_000,

@@ -37,6 +37,13 @@ module.exports = {
       from: { path: stages.concat(beside, ['actions', 'appraise']).map(stage) },
       to: { path: stage('explain') },
     },
+    {
+      name: 'one-door-to-schemas',
+      comment: 'schemas are made only after they have been told not to compile themselves, see lib/zod.ts',
+      severity: 'error',
+      from: { path: '^(lib|notebooks)', pathNot: '^lib/zod\\.ts$' },
+      to: { path: 'node_modules/zod/' },
+    },
     { name: 'no-circle', severity: 'error', from: {}, to: { circular: true } },
     ...leftToRight,
     {

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import hl93 from '../../data/standards/hl93.json';
 import lm1 from '../../data/standards/lm1.json';
 import { standardIds, type StandardId } from '../model/index.ts';

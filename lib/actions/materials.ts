@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import file from '../../data/materials.json';
 import { standardIds, type StandardId } from '../model/index.ts';
 import { loadStandard } from './loadStandard.ts';

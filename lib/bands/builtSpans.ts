@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import raw from '../../data/built-spans.json';
 import { formIds, type FormId } from '../model/index.ts';
 

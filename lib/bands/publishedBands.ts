@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import raw from '../../data/published-bands.json';
 import { formIds, type FormId } from '../model/index.ts';
 

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 
 const scalar = z.union([z.number(), z.string(), z.boolean()]);
 

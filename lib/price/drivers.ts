@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import raw from '../../data/rates/drivers.json';
 import { formIds } from '../model/index.ts';
 import { items } from '../takeoff/index.ts';

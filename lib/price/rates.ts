@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import demo2026 from '../../data/rates/demo-2026.json';
 import type { Books, Spread } from '../model/index.ts';
 import { items } from '../takeoff/index.ts';

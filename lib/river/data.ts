@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import raw from '../../data/river.json';
 
 const figure = z

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import type { AskedOf, FormId } from '../model/index.ts';
 import { familyOf, formIds } from '../model/index.ts';
 import methodFactsJson from '../../data/rules/facts-methods.json';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import { families, formIds } from '../model/index.ts';
 
 /** Comparators of a condition. Text and yes/no facts take `=` and `!=` only. */

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import raw from '../../data/road.json';
 import { standardIds, type Road, type RoadCurves, type StandardId } from '../model/index.ts';
 

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import rawGround from '../../data/ground.json' with { type: 'json' };
 import {
   groundClassIds,

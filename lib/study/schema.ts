@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../zod.ts';
 import {
   approachSidesKinds,
   formIds,
@@ -13,9 +13,6 @@ import {
   type FormId,
 } from '../model/index.ts';
 import { fillGround } from './fillGround.ts';
-
-// The pages forbid evaluated code, so schemas must not compile themselves.
-z.config({ jitless: true });
 
 /** Version of the study file written by this tool. */
 export const studyVersion = 1;

@@ -1,4 +1,4 @@
-import type { z } from 'zod';
+import type { z } from '../zod.ts';
 import type { Problem, ProblemCode } from '../model/index.ts';
 import { problem } from './problem.ts';
 import { shown } from './shown.ts';

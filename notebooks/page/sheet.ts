@@ -274,7 +274,6 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
         window.removeEventListener('beforeprint', before);
         window.removeEventListener('afterprint', after);
       });
-      lines.redraw();
       return element;
     },
 

@@ -135,7 +135,11 @@ export function stationLines(
     drawUpright(input);
     drawFlat(widthPx);
   };
-  const redraw = (): void => frames.request(drawNow);
+  /** Before the page has been laid out once, to ask for places would lay it out without its drawings. */
+  let isLaidOut = false;
+  const redraw = (): void => {
+    if (isLaidOut) frames.request(drawNow);
+  };
 
   const join = (): void => {
     const at = isPaper ? undefined : (pointed ?? focused);
@@ -183,7 +187,10 @@ export function stationLines(
   );
   window.addEventListener('scroll', () => joined && redraw(), { signal, passive: true });
   window.addEventListener('resize', redraw, { signal });
-  const watcher = new ResizeObserver(redraw);
+  const watcher = new ResizeObserver(() => {
+    isLaidOut = true;
+    redraw();
+  });
   watcher.observe(sheet);
 
   return {

@@ -2,7 +2,8 @@ import { readStudy, sentence, survey, writeStudy, type Site } from '../../lib/in
 import { scaleBar } from '../drawing/scaleBar.ts';
 import { largestScale } from '../drawing/scale.ts';
 import { sheet as drawingSheet } from '../drawing/sheet.ts';
-import { exampleNames, workedExample, type ExampleName } from '../examples.ts';
+import { exampleNames, type ExampleName } from '../exampleNames.ts';
+import { workedExample } from '../examples.ts';
 import { countWords, fixed, listed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import {

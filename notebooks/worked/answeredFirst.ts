@@ -1,13 +1,5 @@
 import { fingerprint, type Appraisal } from '../../lib/index.ts';
-import type { ExampleName } from '../examples.ts';
 import type { Appraiser } from '../worker/index.ts';
-import { readAnswer } from './answerText.ts';
-
-/** The answer to a worked example that came with the pages; null where none did. */
-export async function answerOf(example: ExampleName): Promise<Appraisal | null> {
-  const response = await fetch(`./worked/${example}.json`);
-  return response.ok ? readAnswer(await response.text()) : null;
-}
 
 /** Signs that somebody is about to change something. */
 const SIGNS = ['pointermove', 'pointerdown', 'keydown', 'wheel', 'focusin'] as const;
@@ -22,30 +14,48 @@ function atFirstSign(work: () => void): void {
 }
 
 /**
- * The same appraiser, which gives the answer that came with the pages to the first study it is asked, if that is the study
- * which the answer was worked out for. The workers work it out all the same: the next study is nearly always this one with
- * one thing changed. When that is asked they leave off: they remember what they have found.
+ * An appraiser that gives the answer which came with the pages to the first study it is asked, if that is the study which
+ * the answer was worked out for; its workers begin when they are needed, so that the page has the processors to itself
+ * while it opens. They work out that study all the same: the next one is nearly always this one with one thing changed.
+ * When that is asked they leave off: they remember what they have found.
  */
 export function answeredFirst(
-  workers: Appraiser,
+  begin: () => Appraiser,
   came: Promise<Appraisal | null>,
   later: (work: () => void) => void = atFirstSign,
 ): Appraiser {
   let isFirst = true;
+  let isHeld = false;
+  let begun: Appraiser | undefined;
   const other = new AbortController();
+  const workers = (): Appraiser => {
+    if (begun === undefined) {
+      begun = begin();
+      begun.hold(isHeld);
+    }
+    return begun;
+  };
   return {
-    ...workers,
     async appraise(study, run) {
       if (!isFirst) other.abort();
       const answer = isFirst ? await came.catch(() => null) : null;
       isFirst = false;
       run?.signal?.throwIfAborted();
-      if (answer?.study.fingerprint !== fingerprint(study)) return workers.appraise(study, run);
+      if (answer?.study.fingerprint !== fingerprint(study)) return workers().appraise(study, run);
       later(() => {
         const { signal } = other;
-        if (!signal.aborted) void workers.appraise(study, { signal }).catch(() => undefined);
+        if (!signal.aborted)
+          void workers()
+            .appraise(study, { signal })
+            .catch(() => undefined);
       });
       return answer;
     },
+    workOut: (study, options, run) => workers().workOut(study, options, run),
+    hold(held) {
+      isHeld = held;
+      begun?.hold(held);
+    },
+    end: () => begun?.end(),
   };
 }

@@ -1,5 +1,6 @@
 import { appraise } from '../../lib/index.ts';
-import { exampleNames, workedExample } from '../examples.ts';
+import { exampleNames } from '../exampleNames.ts';
+import { workedExample } from '../examples.ts';
 import { writeAnswer } from './answerText.ts';
 import { askedOf } from './askedOf.ts';
 

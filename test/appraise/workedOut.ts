@@ -1,5 +1,6 @@
 import type { Appraisal, Study } from '../../lib/index.ts';
-import { workedExample, type ExampleName } from '../../notebooks/examples.ts';
+import type { ExampleName } from '../../notebooks/exampleNames.ts';
+import { workedExample } from '../../notebooks/examples.ts';
 import { answerTo } from './answerTo.ts';
 
 const studies = new Map<ExampleName, Study>();

@@ -13,7 +13,7 @@ import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
 import type { Page } from 'playwright-core';
 import { build } from 'vite';
-import { exampleNames } from '../../notebooks/examples.ts';
+import { exampleNames } from '../../notebooks/exampleNames.ts';
 import { openSite } from '../browser/site.ts';
 
 /** What one drag came to. */

@@ -6,7 +6,7 @@ import {
   sizeableForms,
   type AppraisedOption,
 } from '../../lib/index.ts';
-import { exampleNames, type ExampleName } from '../../notebooks/examples.ts';
+import { exampleNames, type ExampleName } from '../../notebooks/exampleNames.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
 import { deckStrips } from '../../notebooks/drawing/deckStrips.ts';
 import { elevation, wantsWidth } from '../../notebooks/drawing/elevation.ts';

@@ -54,22 +54,27 @@ describe('answeredFirst(workers, answer)', () => {
 
   it('gives the answer to the study it is of and lets the workers work it out as well', async () => {
     const behind = workers();
-    expect(await currencies(answeredFirst(behind, Promise.resolve(answer), at), study)).toEqual(['EUR']);
+    expect(
+      await currencies(
+        answeredFirst(() => behind, Promise.resolve(answer), at),
+        study,
+      ),
+    ).toEqual(['EUR']);
     expect(behind.asked.map(fingerprint)).toEqual([fingerprint(study)]);
   });
   it('asks the workers about any other study and about every later one', async () => {
-    expect(await currencies(answeredFirst(workers(), Promise.resolve(answer), at), changed, study)).toEqual([
+    expect(await currencies(answeredFirst(workers, Promise.resolve(answer), at), changed, study)).toEqual([
       'worked out',
       'worked out',
     ]);
-    expect(await currencies(answeredFirst(workers(), Promise.resolve(answer), at), study, study)).toEqual([
+    expect(await currencies(answeredFirst(workers, Promise.resolve(answer), at), study, study)).toEqual([
       'EUR',
       'worked out',
     ]);
   });
   it('lets the workers leave off what was shown already once they are asked something else', async () => {
     const behind = workers();
-    const first = answeredFirst(behind, Promise.resolve(answer), at);
+    const first = answeredFirst(() => behind, Promise.resolve(answer), at);
     await first.appraise(study);
     expect(behind.given[0]?.aborted).toBe(false);
     await first.appraise(changed);
@@ -77,8 +82,8 @@ describe('answeredFirst(workers, answer)', () => {
     expect(behind.given[1]).toBeUndefined();
   });
   it('asks the workers where no answer came', async () => {
-    expect(await currencies(answeredFirst(workers(), Promise.resolve(null)), study)).toEqual(['worked out']);
+    expect(await currencies(answeredFirst(workers, Promise.resolve(null)), study)).toEqual(['worked out']);
     const failed = Promise.reject(new Error('offline'));
-    expect(await currencies(answeredFirst(workers(), failed), study)).toEqual(['worked out']);
+    expect(await currencies(answeredFirst(workers, failed), study)).toEqual(['worked out']);
   });
 });

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/forms/adjacent-box.json';
 import { cited } from '../common/cited.ts';
 import { diaphragmData } from '../common/precast/diaphragmData.ts';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/forms/cable-stayed.json';
 import { cited } from '../common/cited.ts';
 

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 
 /** A practical figure with where it comes from, as it stands in `data/forms`. */
 export const cited = z.object({ value: z.number(), source: z.string().min(1) });

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/forms/plates.json';
 import type { StandardId } from '../../model/index.ts';
 import { cited } from './cited.ts';

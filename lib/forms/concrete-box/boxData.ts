@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/forms/concrete-box.json';
 import { cited, citedByStandard } from '../common/cited.ts';
 

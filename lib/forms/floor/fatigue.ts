@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/forms/fatigue.json';
 import { runGroup, straightLine, type AxleGroup, type Extremes, type Track } from '../../mechanics/index.ts';
 import type { StandardId } from '../../model/index.ts';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import raw from '../../../data/forms/floor.json' with { type: 'json' };
 
 const figure = z.strictObject({ value: z.number(), source: z.string() });

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/girders/aashto-pci.json';
 import type { SectionPoint } from '../../mechanics/index.ts';
 import type { StandardId } from '../../model/index.ts';

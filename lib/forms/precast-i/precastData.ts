@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/forms/precast-i.json';
 import { diaphragmData } from '../common/precast/diaphragmData.ts';
 

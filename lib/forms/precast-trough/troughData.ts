@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import json from '../../../data/forms/precast-trough.json';
 import { diaphragmData } from '../common/precast/diaphragmData.ts';
 

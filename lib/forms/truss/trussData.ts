@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../zod.ts';
 import raw from '../../../data/forms/truss.json' with { type: 'json' };
 
 const sourced = <T extends z.ZodRawShape>(shape: T) => z.strictObject({ ...shape, source: z.string() });

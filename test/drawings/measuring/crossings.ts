@@ -1,5 +1,5 @@
 import type { Appraisal, FormId, Study } from '../../../lib/index.ts';
-import { exampleNames, type ExampleName } from '../../../notebooks/examples.ts';
+import { exampleNames, type ExampleName } from '../../../notebooks/exampleNames.ts';
 import { exampleStudy, workedOut } from '../../appraise/workedOut.ts';
 import { answerTo } from '../../appraise/answerTo.ts';
 

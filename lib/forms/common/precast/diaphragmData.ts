@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from '../../../zod.ts';
 
 /**
  * Cross-walls of a precast deck: thicknesses over a pier, at the ends and within a span, m; how far apart those within a span

@@ -1,0 +1,230 @@
+import { readStudy, sentence, writeStudy, type Problem, type Study } from '../../lib/index.ts';
+import { exampleNamed } from '../exampleNames.ts';
+import { workedExample } from '../examples.ts';
+import { h } from '../html.ts';
+import {
+  deviceCupboard,
+  fileName,
+  isOf,
+  journal,
+  keeping,
+  openFile,
+  pagesFrom,
+  readOnly,
+  saveFile,
+  savedWords,
+  sheet,
+  studyShelf,
+  studyStore,
+  undoKeys,
+  whileDragged,
+  type Journal,
+  type Keeping,
+  type StudyShelf,
+} from '../page/index.ts';
+import { graph as newGraph } from '../reactive/index.ts';
+import { answeredFirst } from '../worked/answeredFirst.ts';
+import { readAnswer } from '../worked/answerText.ts';
+import { appraiser } from '../worker/index.ts';
+import { arrangementSection } from './arrangementSection.ts';
+import { briefSection } from './briefSection.ts';
+import { costSection } from './costSection.ts';
+import { depthSection } from './depthSection.ts';
+import { programmeSection, tradeOffSection } from './programmeSection.ts';
+import { quantitySection } from './quantitySection.ts';
+import { rankingSection } from './rankingSection.ts';
+import { sectionSection } from './sectionSection.ts';
+import { spanSection } from './spanSection.ts';
+import { studyCells } from './studyCells.ts';
+import { studyWhereFrom } from './whereFrom.ts';
+import { answerWords, nextWords, pricesWords } from './words.ts';
+
+/** What is wrong with a study; nothing when it is valid. Read back from its own text, as a file would be. */
+function check(study: Study): readonly Problem[] {
+  const read = readStudy(writeStudy(study));
+  return read.ok ? [] : read.problems;
+}
+
+const query = new URLSearchParams(location.search);
+
+/** A study as a page begins with it. */
+interface Opened {
+  readonly id: string;
+  readonly study: Study;
+  readonly revision: number;
+  readonly problem: string;
+  /** What was changed last time had not been saved when the page was closed. */
+  readonly isUnsaved: boolean;
+}
+
+/** The study named in the address with what had not been saved of it, or a worked example under an id of its own. */
+async function opened(shelf: StudyShelf | null, waiting: Journal): Promise<Opened> {
+  const id = query.get('study');
+  const study = workedExample(exampleNamed(query.get('example')));
+  const anew = { id: crypto.randomUUID(), study, revision: 0, problem: '', isUnsaved: false };
+  if (id === null || shelf === null) return { ...anew, ...(id !== null && { id }) };
+  const loaded = await shelf.load(id);
+  const unsaved = waiting.get(id);
+  const revision = loaded.ok ? loaded.value.revision : 0;
+  if (unsaved !== undefined && isOf(unsaved, revision)) {
+    const read = readStudy(unsaved.text);
+    if (read.ok) return { ...anew, id, study: read.value, revision, isUnsaved: true };
+  }
+  if (loaded.ok) return { ...anew, id, ...loaded.value };
+  return {
+    ...anew,
+    problem: `The study asked for was not opened: ${loaded.problems.map(sentence).join(' ')} A worked example is shown instead.`,
+  };
+}
+
+/**
+ * Opens the page.
+ * @param coming text of the answer to the worked example that is asked for; null where a study is
+ */
+export async function openPage(coming: Promise<string | null> | null): Promise<void> {
+  // Without an answer they load while the page looks for its study.
+  const workers =
+    coming === null
+      ? appraiser()
+      : answeredFirst(
+          appraiser,
+          coming.then((text) => (text === null ? null : readAnswer(text))),
+        );
+  // The hand has both processors to itself.
+  whileDragged(workers.hold);
+  const cupboard = await deviceCupboard().catch(() => null);
+  const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
+  const unsaved = journal(localStorage);
+  const { study, problem, id, revision, isUnsaved } = await opened(shelf, unsaved);
+  let kept: Keeping | null = null;
+
+  const graph = newGraph();
+  const store = studyStore(graph, study, check, () => kept?.mayChange() ?? true);
+  const cells = studyCells(graph, store, workers);
+  const page = sheet(graph, { aside: [cells.byDepth, cells.spanning] });
+
+  const saved = h('span', { class: 'state', role: 'status' }, problem);
+  const button = (words: string, act: () => void): HTMLElement =>
+    h('button', { type: 'button', class: 'action', onclick: act }, words);
+  const whole = (): Study => {
+    const valid = store.valid();
+    return { ...valid, options: { ...valid.options, register: cells.register() } };
+  };
+  const openStudy = async (): Promise<void> => {
+    const text = await openFile();
+    if (text === null) return;
+    const read = readStudy(text);
+    if (!read.ok) {
+      saved.textContent = `Not opened, the study on the page is kept. ${read.problems.map(sentence).join(' ')}`;
+      return;
+    }
+    // A study from a file is another study: it never takes the place of the one that was on the page.
+    kept?.startAnew(crypto.randomUUID());
+    store.open(read.value);
+  };
+  const undo = button('Undo', store.undo);
+  const redo = button('Redo', store.redo);
+  graph.watch(store.history, (state) => {
+    if (state.state !== 'ready') return;
+    for (const [element, word, what] of [
+      [undo, 'Undo', state.value.undo],
+      [redo, 'Redo', state.value.redo],
+    ] as const) {
+      element.toggleAttribute('disabled', what === null);
+      element.title = what === null ? `Nothing to ${word.toLowerCase()}` : `${word} ${what}`;
+    }
+  });
+  undoKeys(store);
+
+  const { head, brief, books } = store.slices;
+  const element = page.mount(document.body, {
+    bar: {
+      pages: pagesFrom('option-study'),
+      tools: [
+        saved,
+        undo,
+        redo,
+        button('Open', () => void openStudy()),
+        button('Save as file', () => saveFile(fileName(whole()), writeStudy(whole()))),
+        button('Print', () => print()),
+      ],
+    },
+    head: {
+      title: page.live({ head }, (v) => v.head.title),
+      answer: page.live({ appraisal: cells.appraisal }, (v) => answerWords(v.appraisal)),
+      next: page.live({ brief }, (v) => nextWords(v.brief)),
+      block: [
+        ['Study', page.live({ head }, (v) => v.head.reference)],
+        ['Prices', page.live({ brief, books }, (v) => `${pricesWords(v)}, demo rates`)],
+        [
+          'Loading',
+          page.live({ brief }, (v) => (v.brief.loading === 'lm1' ? 'EN 1991-2, LM1' : 'AASHTO HL-93')),
+        ],
+        ['Levels', 'm above local datum'],
+        ['Stage', 'option study; not for construction'],
+        [
+          'Fingerprint',
+          page.live({ appraisal: cells.appraisal }, (v) => v.appraisal.study.fingerprint.slice(0, 12)),
+        ],
+      ],
+    },
+    sections: [
+      briefSection(page, graph, store, cells),
+      spanSection(page, cells),
+      arrangementSection(page, graph, store, cells),
+      depthSection(page, cells),
+      sectionSection(page, cells),
+      quantitySection(page, cells),
+      costSection(page, graph, store, cells),
+      programmeSection(page, cells),
+      tradeOffSection(page, cells),
+      rankingSection(page, cells),
+    ],
+  });
+  studyWhereFrom(graph, cells, element);
+  document.title = `${study.title} · Spanledger`;
+
+  const setReadOnly = readOnly(element);
+  let addressed: string | null = null;
+  /** Puts the study into the address, where it is not there yet: telling the browser takes longer than a drawing. */
+  const address = (): void => {
+    if (kept === null || kept.id() === addressed) return;
+    addressed = kept.id();
+    history.replaceState(null, '', `?study=${encodeURIComponent(addressed)}`);
+  };
+  if (shelf !== null) {
+    kept = keeping({
+      id,
+      revision,
+      shelf,
+      journal: unsaved,
+      format: { readStudy, writeStudy },
+      locks: navigator.locks,
+      study: whole,
+      show: store.open,
+      saved: (savedAt) => (saved.textContent = savedWords(savedAt)),
+      refused: (problems) => (saved.textContent = problems.map(sentence).join(' ')),
+      owned(isMine) {
+        setReadOnly(!isMine);
+        if (isMine) saved.replaceChildren(problem);
+        else
+          saved.replaceChildren(
+            'Read only: another tab has this study open. ',
+            button('Work on it here', () => kept?.takeOver()),
+          );
+      },
+    });
+    if (isUnsaved) kept.changed();
+  }
+  let first = true;
+  graph.watch(store.draft, (state) => {
+    if (state.state !== 'ready') return;
+    // Opening a study changes nothing; only an edit is saved.
+    if (first) {
+      first = false;
+      return;
+    }
+    kept?.changed();
+    address();
+  });
+}
