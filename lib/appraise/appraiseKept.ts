@@ -1,5 +1,12 @@
 import { faultsOf } from '../arrange/index.ts';
-import type { AppraisedOption, Option, Study, Unit } from '../model/index.ts';
+import {
+  asMade,
+  saidOf,
+  type AppraisedOption,
+  type MadeOption,
+  type Study,
+  type Unit,
+} from '../model/index.ts';
 import { siteOf } from '../site/index.ts';
 import { appraiseOptionAt } from './appraiseOption.ts';
 import { drawn } from './drawn.ts';
@@ -45,8 +52,8 @@ export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory
   const ownSite = siteOf(site, units);
   const depthsM = depthsOf(units, before, own?.depthM ?? null);
   const depthM = depthsM[units.indexOf(mainUnit(units))]!;
-  const variant = own?.variant ?? before.variant ?? {};
-  const option: Option = { number, form, method, units, depthM, variant, origin: 'kept' };
+  const variant = asMade(own?.variant, before.variant ?? {}) ?? saidOf(own?.variant ?? {});
+  const option: MadeOption = { number, form, method, units, depthM, variant, origin: 'kept' };
   const onDraws = drawn(bench, [...new Set(units.map((unit) => unit.form))]);
   const faults = faultsOf(units, requestFor(option, ownSite, patternOf(form, units)), ownSite);
   try {

@@ -1,5 +1,5 @@
 import { faultsOf } from '../arrange/index.ts';
-import type { AppraisedOption, Check, Option, Status, WorkedOption } from '../model/index.ts';
+import type { AppraisedOption, Check, MadeOption, Option, Status, WorkedOption } from '../model/index.ts';
 import { optionError, priceOption, type PricedOption } from '../price/index.ts';
 import { rulingsFor, statusOf } from '../rules/index.ts';
 import { expectedLines } from '../substructure/index.ts';
@@ -40,7 +40,7 @@ export function* appraiseOption(bench: Workbench, drawn: Drawn, option: Option):
 export function appraiseOptionAt(
   bench: Workbench,
   drawn: Drawn,
-  option: Option,
+  option: MadeOption,
   depthsM: readonly number[],
 ): PricedAppraisal {
   const own = benchFor(bench, option.units);

@@ -1,5 +1,5 @@
 import { formModule } from '../forms/index.ts';
-import type { Option, Site, Unit, UnitTask } from '../model/index.ts';
+import type { MadeOption, Site, Unit, UnitTask } from '../model/index.ts';
 
 /** Spans of a unit, m. */
 export function spansOf(unit: Unit): number[] {
@@ -9,7 +9,7 @@ export function spansOf(unit: Unit): number[] {
 /** What a unit of an option is asked to be, but for its depth and what it stands over. */
 export function askedTask(
   site: Site,
-  { method, variant = {} }: Pick<Option, 'method' | 'variant'>,
+  { method, variant = {} }: Pick<MadeOption, 'method' | 'variant'>,
   unit: Unit,
 ): Omit<UnitTask, 'depthM'> {
   const isMain = unit.role === 'main';

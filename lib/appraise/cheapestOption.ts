@@ -1,5 +1,14 @@
 import { formModule } from '../forms/index.ts';
-import type { Option, Unit, Variant } from '../model/index.ts';
+import {
+  asMade,
+  isOpen,
+  saidOf,
+  type AskedVariant,
+  type MadeOption,
+  type Option,
+  type Unit,
+  type Variant,
+} from '../model/index.ts';
 import { depthRange } from './depthRange.ts';
 import { leastCostDepth, type DepthTrial } from './leastCostDepth.ts';
 import type { Work } from './work.ts';
@@ -16,7 +25,7 @@ const FIRST_TRY = { haunched: 0.9, substringers: 1.2, other: 1 } as const;
 
 /** Depth of least cost of an option made one way, m, and what it comes to. */
 interface Made {
-  readonly option: Option;
+  readonly option: MadeOption;
   readonly depthM: number;
   readonly trial: DepthTrial;
 }
@@ -33,7 +42,11 @@ const isBetter = (one: DepthTrial, than: DepthTrial): boolean =>
  * Depths worth trying, m: the published band of how the option is made; of a plain one no more than somewhat over that of
  * least deck cost, since clearance, road and supports only ever ask for less depth than the deck alone.
  */
-function depthsToTry(bench: Workbench, option: Option, main: Unit): readonly [least: number, most: number] {
+function depthsToTry(
+  bench: Workbench,
+  option: MadeOption,
+  main: Unit,
+): readonly [least: number, most: number] {
   const spans = spansOf(main);
   const { variant = {} } = option;
   const [least, most] = depthRange(main.form, option.method, spans, bench.site, variant);
@@ -43,7 +56,7 @@ function depthsToTry(bench: Workbench, option: Option, main: Unit): readonly [le
 }
 
 /** The shallowest depth within 1 % of the least cost of the whole crossing at mean rates. */
-function* atBestDepth(bench: Workbench, option: Option, nearM: number): Work<Made> {
+function* atBestDepth(bench: Workbench, option: MadeOption, nearM: number): Work<Made> {
   const main = mainUnit(option.units);
   const tryAt = (depthM: number): DepthTrial => trialAt(bench, option, depthM);
   const depthM = yield* leastCostDepth(depthsToTry(bench, option, main), tryAt, nearM);
@@ -51,16 +64,19 @@ function* atBestDepth(bench: Workbench, option: Option, nearM: number): Work<Mad
 }
 
 /**
- * The cheapest way of making an option: plain, or one of the variants of its form where that saves more than 1 %. Every
- * variant is tried once; only for the best of them, where it promises anything, the depth is sought again.
+ * The cheapest way of making an option as it is asked: with no more than was asked, or one of the variants of its form that
+ * agree with that where it saves more than 1 %. Every variant is tried once; only for the best of them, where it promises
+ * anything, the depth is sought again.
  */
-function* cheapestMade(bench: Workbench, plain: Made): Work<Made> {
+function* cheapestMade(bench: Workbench, plain: Made, asked: AskedVariant | undefined): Work<Made> {
   const { form, method, units, depthM: typedM } = plain.option;
   const main = mainUnit(units);
   const tried: Made[] = [];
   for (const variant of formModule(form).variants?.(spansOf(main), bench.site.deck, method) ?? []) {
-    const option: Option = { ...plain.option, variant };
-    const depthM = typedM ?? firstTryM(bench, option, variant, plain.depthM);
+    const made = asMade(asked, variant);
+    if (made === null) continue;
+    const option: MadeOption = { ...plain.option, variant: made };
+    const depthM = typedM ?? firstTryM(bench, option, made, plain.depthM);
     tried.push({ option, depthM, trial: trialAt(bench, option, depthM) });
     yield;
   }
@@ -75,7 +91,7 @@ function* cheapestMade(bench: Workbench, plain: Made): Work<Made> {
 
 function firstTryM(
   bench: Workbench,
-  option: Option,
+  option: MadeOption,
   { haunchRatio, substringers }: Variant,
   plainM: number,
 ): number {
@@ -94,13 +110,13 @@ function firstTryM(
  */
 export function* workOption(bench: Workbench, option: Option): Work<Worked> {
   const main = mainUnit(option.units);
-  const first: Option = { ...option, variant: option.variant ?? {} };
+  const first: MadeOption = { ...option, variant: saidOf(option.variant ?? {}) };
   const nearM = bench.tables.tableFor(option).depthM(main.form, Math.max(...spansOf(main)));
   const { depthM } = option;
   const plain =
     depthM === null
       ? yield* atBestDepth(bench, first, nearM)
       : { option: first, depthM, trial: trialAt(bench, first, depthM) };
-  const made = option.variant === undefined ? yield* cheapestMade(bench, plain) : plain;
+  const made = isOpen(option.variant) ? yield* cheapestMade(bench, plain, option.variant) : plain;
   return workOptionAt(bench, made.option, depthsOf(bench, made.option, made.depthM));
 }

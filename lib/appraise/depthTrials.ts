@@ -1,4 +1,4 @@
-import type { AppraisedOption, Option, Study } from '../model/index.ts';
+import type { AppraisedOption, MadeOption, Study } from '../model/index.ts';
 import { survey } from '../site/index.ts';
 import { depthRange } from './depthRange.ts';
 import { spansOf } from './askedTask.ts';
@@ -15,7 +15,7 @@ const STEPS = 20;
  * An option at its own depth of the main unit, m, and at depths about it inside the published band, rising: worked out,
  * they show what depth does to the cost of the whole crossing. Never fewer than the option itself.
  */
-export function depthTrials(study: Study, worked: AppraisedOption): readonly Option[] {
+export function depthTrials(study: Study, worked: AppraisedOption): readonly MadeOption[] {
   const { number, form, method, units, designs, variant = {} } = worked;
   const main = mainUnit(units);
   const ownM = designs[units.indexOf(main)]!.task.depthM;

@@ -1,7 +1,7 @@
 import { formModule } from '../forms/index.ts';
 import { abutmentWindows } from '../site/index.ts';
 import { sentences } from '../messages/index.ts';
-import type { KeptOption, Site, Unit, UnitTask } from '../model/index.ts';
+import { saidOf, type KeptOption, type Problem, type Site, type Unit } from '../model/index.ts';
 import { askedTask } from './askedTask.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 
@@ -43,16 +43,34 @@ function unsizeable({ form, supportsM, pylons = [] }: Unit): string | null {
     : `${name}: one or two pylons on inner supports expected`;
 }
 
-/** Why a unit cannot be made as its choices ask. */
-function amiss(task: Omit<UnitTask, 'depthM'>): string[] {
-  const form = formModule(task.form);
-  return sentences(form.faults?.(task) ?? []).map((text) => `${form.name}: ${text}`);
+/** Choices of a form as an option kept by hand asks for them. */
+type Chosen = Pick<KeptOption, 'form' | 'method' | 'units' | 'variant'>;
+
+const haunchOverNothing: Problem = {
+  code: 'refused',
+  path: ['haunchRatio'],
+  expected: 'spans that go on over inner supports',
+  received: 'a single span, with none to be deeper over',
+  remedy: 'Leave the haunch out or add a pier',
+};
+
+/** Why the main units of an option cannot be made as its choices ask, by paths of its variant; none where they can. */
+export function choiceFaults(site: Site, { form, method, units, variant = {} }: Chosen): readonly Problem[] {
+  const module = formModule(form);
+  const said = saidOf(variant);
+  const isHaunched = said.haunchRatio !== undefined;
+  return units
+    .filter(({ role }) => role === 'main')
+    .flatMap((unit) => [
+      ...(isHaunched && unit.supportsM.length === 2 ? [haunchOverNothing] : []),
+      ...(module.faults?.(askedTask(site, { method, variant: said }, unit)) ?? []),
+    ]);
 }
 
 /** Units of an option kept by hand on the crossing as it is now, or why it cannot be worked out at all. */
 export function keptUnits(
   site: Site,
-  { form, method, units, variant = {} }: Pick<KeptOption, 'form' | 'method' | 'units' | 'variant'>,
+  { form, method, units, variant = {} }: Chosen,
 ): { readonly units: readonly Unit[] } | { readonly because: readonly string[] } {
   const placed = between(site, units);
   if (placed === null) return { because: [BEYOND_ABUTMENT] };
@@ -63,8 +81,8 @@ export function keptUnits(
     const has = choices.length === 0 ? 'it is made in one way only' : `it has ${choices.join(', ')}`;
     because.push(`${name}: ${foreign.join(', ')} cannot be chosen; ${has}`);
   } else {
-    for (const unit of placed)
-      if (unit.role === 'main') because.push(...amiss(askedTask(site, { method, variant }, unit)));
+    const faults = choiceFaults(site, { form, method, units: placed, variant });
+    because.push(...sentences(faults).map((text) => `${name}: ${text}`));
   }
   return because.length > 0 ? { because } : { units: placed };
 }

@@ -1,7 +1,7 @@
 import { formModule } from '../forms/index.ts';
 import type {
   Design,
-  Option,
+  MadeOption,
   RoadProfile,
   Site,
   Unit,
@@ -66,7 +66,7 @@ function haunchOf({ haunchRatio }: Variant = {}, depthM: number): Pick<UnitTask,
 
 function taskOf(
   bench: Workbench,
-  option: Option,
+  option: MadeOption,
   unit: Unit,
   depthM: number,
   profile: RoadProfile,
@@ -124,7 +124,7 @@ const moneyOf = ({ costOf }: Workbench, { supports, lines }: AtDepth): number =>
  * An option at given depths of its units, m, on the cheapest of its roads: the lowest that clears, and where a fixed end has
  * an existing road behind it of known gradient, the one with a crest as sharp as spares the curve there.
  */
-function workAt(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
+function workAt(bench: Workbench, option: MadeOption, depthsM: readonly number[]): AtDepth {
   const lowest = workOn(bench, option, depthsM);
   return (['start', 'end'] as const)
     .filter((end) => easedProfile(bench.site, lowest.profile, end) !== null)
@@ -135,7 +135,7 @@ function workAt(bench: Workbench, option: Option, depthsM: readonly number[]): A
 /** An option at given depths of its units, m: designs, road, supports, quantities and months. */
 function workOn(
   bench: Workbench,
-  option: Option,
+  option: MadeOption,
   depthsM: readonly number[],
   easedFor?: RoadProfile['easedFor'],
 ): AtDepth {
@@ -162,18 +162,18 @@ function workOn(
   return { designs, profile, supports, lines, months: programme.months };
 }
 
-const keyOf = ({ form, method, units, variant = {} }: Option, depthsM: readonly number[]): string =>
+const keyOf = ({ form, method, units, variant = {} }: MadeOption, depthsM: readonly number[]): string =>
   JSON.stringify([form, method, units, depthsM, variant]);
 
 /** The same, from memory where it has been worked out before. */
-function atDepths(bench: Workbench, option: Option, depthsM: readonly number[]): AtDepth {
+function atDepths(bench: Workbench, option: MadeOption, depthsM: readonly number[]): AtDepth {
   // Abutments are chosen by cost, so the books are part of what it is made from.
   const key = `${keyOf(option, depthsM)} ${bench.booksKey}`;
   return remembered(bench.keptHere.atDepth, key, () => workAt(bench, option, depthsM));
 }
 
 /** Depths of all units, m, when the main unit has the one given: approaches have theirs of least deck cost. */
-export function depthsOf(bench: Workbench, option: Option, depthM: number): number[] {
+export function depthsOf(bench: Workbench, option: MadeOption, depthM: number): number[] {
   const table = bench.tables.tableFor(option);
   return option.units.map((unit) =>
     unit.role === 'main'
@@ -183,7 +183,7 @@ export function depthsOf(bench: Workbench, option: Option, depthM: number): numb
 }
 
 /** What an option made one way comes to at one depth of its main unit, m. */
-export function trialAt(bench: Workbench, option: Option, depthM: number): DepthTrial {
+export function trialAt(bench: Workbench, option: MadeOption, depthM: number): DepthTrial {
   const { site } = bench;
   const found = atDepths(bench, option, depthsOf(bench, option, depthM));
   const { designs, profile } = found;
@@ -203,7 +203,7 @@ export interface Worked {
 }
 
 /** One option at depths that are given for each of its units, m; see `workOption`. */
-export function workOptionAt(bench: Workbench, option: Option, depthsM: readonly number[]): Worked {
+export function workOptionAt(bench: Workbench, option: MadeOption, depthsM: readonly number[]): Worked {
   const { number, form, method, units, variant = {} } = option;
   const found = atDepths(bench, option, depthsM);
   const { depthM } = found.designs[units.indexOf(mainUnit(units))]!;

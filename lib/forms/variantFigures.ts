@@ -1,7 +1,8 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 
 const kept = (at: At): number => at.study.options.kept.findIndex(({ number }) => number === at.option.number);
-const isTyped = (at: At): boolean => at.study.options.kept[kept(at)]?.variant?.haunchRatio !== undefined;
+const isTyped = (at: At): boolean =>
+  typeof at.study.options.kept[kept(at)]?.variant?.haunchRatio === 'number';
 const unit = (steps: string): string => `options/:option/designs/:unit/${steps}`;
 const path = 'options/:option/variant/haunchRatio';
 const label = 'depth over the inner supports over that at midspan';

@@ -1,5 +1,5 @@
 import type { FormId, MethodId } from './ids.ts';
-import type { Variant } from './variant.ts';
+import type { AskedVariant, Variant } from './variant.ts';
 import type { Unit } from './study.ts';
 
 /** An option: form, arrangement, depth and method of construction. */
@@ -10,9 +10,14 @@ export interface Option {
   readonly units: readonly Unit[];
   /** Structural depth at midspan of the main unit, m; null until it has been found. */
   readonly depthM: number | null;
-  /** How the main unit is made; absent until the cheapest way has been found. */
-  readonly variant?: Variant;
+  /** How the main unit is asked to be made; absent = least crossing cost. */
+  readonly variant?: AskedVariant;
   readonly origin: 'proposed' | 'kept';
+}
+
+/** An option of which it is settled how its main unit is made; plain where nothing is said. */
+export interface MadeOption extends Option {
+  readonly variant?: Variant;
 }
 
 /** An arrangement as the search returns it. */

@@ -1,4 +1,4 @@
-import type { Variant } from './variant.ts';
+import type { AskedVariant } from './variant.ts';
 import type { FormId, GroundClassId, MethodId, StandardId } from './ids.ts';
 
 /**
@@ -288,7 +288,7 @@ export interface KeptOption {
   /** Structural depth at midspan of the main unit, m; null = least crossing cost. */
   readonly depthM: number | null;
   /** How its main unit is made; absent = least crossing cost. */
-  readonly variant?: Variant;
+  readonly variant?: AskedVariant;
   /** Supports that hold their place while others are moved: 0-based along the crossing, abutments counted. */
   readonly locked?: readonly number[];
 }

@@ -6,7 +6,7 @@ export interface LightConcreteAsked {
   readonly middleM?: readonly number[];
 }
 
-/** How the main unit of an option is made where its form leaves a choice; empty = constant depth under a plain slab, of the usual concrete. The search chooses among the first five; the others are asked for. */
+/** How the main unit of an option is made where its form leaves a choice; empty = constant depth under a plain slab, of the usual concrete. */
 export interface Variant {
   /** Depth over the inner supports over the depth at midspan, above 1: a parabola between them. */
   readonly haunchRatio?: number;
@@ -26,4 +26,32 @@ export interface Variant {
   readonly light?: LightConcreteAsked;
   /** Ballast in the cells of a box by span, kN per m of deck. */
   readonly ballastKNm?: readonly number[];
+}
+
+/** Choices of a variant that the search makes itself where nobody has; the others are as the form finds best until they are asked for. */
+export const searchedChoices = ['haunchRatio', 'substringers', 'transverse', 'struts', 'ribs'] as const;
+type SearchedChoice = (typeof searchedChoices)[number];
+
+/** How the main unit of an option is asked to be made: absent = without, 'unknown' = whichever costs least. */
+export type AskedVariant = Omit<Variant, SearchedChoice> & {
+  readonly [Key in SearchedChoice]?: Variant[Key] | 'unknown';
+};
+
+/** What is said of how a unit is made: what is left to the search is left out. */
+export function saidOf(asked: AskedVariant): Variant {
+  return Object.fromEntries(Object.entries(asked).filter(([, value]) => value !== 'unknown'));
+}
+
+/** Whether anything of how a unit is made is left to the search; all of it where nothing is asked. */
+export const isOpen = (asked: AskedVariant | undefined): boolean =>
+  asked === undefined || searchedChoices.some((key) => asked[key] === 'unknown');
+
+/** What is asked, and what is left open made as in another variant; null where that is against what is asked. */
+export function asMade(asked: AskedVariant | undefined, made: Variant): Variant | null {
+  if (asked === undefined) return made;
+  const said = saidOf(asked);
+  const agrees = searchedChoices.every((key) => asked[key] === 'unknown' || said[key] === made[key]);
+  if (!agrees) return null;
+  const found = searchedChoices.filter((key) => made[key] !== undefined);
+  return { ...said, ...Object.fromEntries(found.map((key) => [key, made[key]])) };
 }

@@ -178,15 +178,20 @@ const unit = z.strictObject({
   pylons: z.array(z.int().min(0).max(4999)).min(1).max(20).exactOptional(),
 });
 
+/** A way of making a unit that the search tries. */
+const made = orUnknown(z.literal(true)).exactOptional();
 /** One figure for each span of the main unit. */
 const bySpan = z.array(z.number().min(0).max(1e5)).min(1).max(5000);
-/** What a form makes of it on its spans is said where it is worked out; here only what can be no figure is refused. */
+/**
+ * How a unit is asked to be made: absent = without, 'unknown' = whichever costs least. What a form makes of it on its
+ * spans is said where it is worked out; here only what can be no figure is refused.
+ */
 const variant = z.strictObject({
-  haunchRatio: z.number().gt(1).max(4).exactOptional(),
-  substringers: z.literal(true).exactOptional(),
-  transverse: z.literal(true).exactOptional(),
-  struts: z.literal(true).exactOptional(),
-  ribs: z.literal(true).exactOptional(),
+  haunchRatio: orUnknown(z.number().gt(1).max(4)).exactOptional(),
+  substringers: made,
+  transverse: made,
+  struts: made,
+  ribs: made,
   boxWidthM: width.exactOptional(),
   strengthMPa: z.number().positive().max(500).exactOptional(),
   light: z

@@ -1,6 +1,7 @@
-import { chainage, fixed, length, level } from '../format.ts';
+import { chainage, length, level } from '../format.ts';
+import { choicesSaid } from '../forms/formChoices.ts';
 import { formLooks } from '../forms/formLook.ts';
-import type { AppraisedOption, Design, FormId, Site, Variant } from '../model.ts';
+import type { AppraisedOption, Design, FormId, Site } from '../model.ts';
 import { spansOf, roadTop, structureTop } from './alongOption.ts';
 
 /** Whether an option's main unit is deeper at its supports than at midspan. */
@@ -26,40 +27,14 @@ export function optionTitle(option: AppraisedOption): string {
   return [look.name, ...(isHaunched(option) && !haunchSaid ? ['haunched'] : []), ...beside].join(', ');
 }
 
-/** How an option is made where that is not the plain way, besides a haunch: its depths say that. */
-function madeWords({
-  substringers,
-  transverse,
-  struts,
-  ribs,
-  boxWidthM,
-  strengthMPa,
-  light,
-  ballastKNm = [],
-}: Variant): string[] {
-  return [
-    ...(substringers ? ['substringers between the girders'] : []),
-    ...(transverse ? ['top slab prestressed across'] : []),
-    ...(struts ? ['wings on struts'] : []),
-    ...(ribs ? ['slab on ribs'] : []),
-    ...(boxWidthM === undefined ? [] : [`box ${level(boxWidthM)} m wide between its webs`]),
-    ...(strengthMPa === undefined ? [] : [`concrete of ${fixed(strengthMPa, 0)} MPa`]),
-    ...(light === undefined
-      ? []
-      : [
-          `lightweight concrete of ${fixed(light.densityKgM3, 0)} kg/m³${light.middleM ? ' about the middles of spans' : ''}`,
-        ]),
-    ...(ballastKNm.some((kNm) => kNm > 0) ? ['ballast in its cells'] : []),
-  ];
-}
-
 /** What is worth knowing of an option beside its spans: its depth, what stands above the road, how the road moves. */
 export function optionNote(site: Site, option: AppraisedOption): string {
   const { support, midspan } = option.depthM;
   const depth = isHaunched(option)
     ? `${level(midspan)} m at midspan, ${level(support)} m at ${onWalls(option.designs) ? 'walls' : 'piers'}`
     : `${level(midspan)} m deep`;
-  const made = madeWords(option.variant ?? {})
+  const { haunchRatio: _depthsSayIt, ...variant } = option.variant ?? {};
+  const made = choicesSaid(variant)
     .map((words) => `, ${words}`)
     .join('');
   const above = structureTop(site, option) - roadTop(site, option);

@@ -15,6 +15,7 @@ import { riverTable } from './riverTable.ts';
 import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
 import { byHand } from './byHand.ts';
+import { choiceTable } from './choiceTable.ts';
 import { anywayWords, droppedTable, droppedTotal } from './droppedTable.ts';
 import { handsOn } from './handsOn.ts';
 import { outTable } from './outTable.ts';
@@ -109,12 +110,16 @@ export function arrangementSection(
       station: '3+010',
       title: 'The reference by hand',
       shows: { reference, options },
-      body: (v) =>
-        byHand(
-          v.reference,
-          v.options.kept.find(({ number }) => number === (v.reference?.number ?? v.options.reference)),
-          store,
+      body: [
+        page.live({ reference, options }, (v) =>
+          byHand(
+            v.reference,
+            v.options.kept.find(({ number }) => number === (v.reference?.number ?? v.options.reference)),
+            store,
+          ),
         ),
+        choiceTable(graph, store, cells),
+      ],
       notes: [
         h(
           'p',

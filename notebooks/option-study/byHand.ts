@@ -1,9 +1,10 @@
 import type { AppraisedOption, KeptOption } from '../../lib/index.ts';
 import { supportName } from '../drawing/alongOption.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
-import { level } from '../format.ts';
+import { level, listed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { StudyStore } from '../page/index.ts';
+import { askedWords } from './choiceEdits.ts';
 import { released, withDepth, withLock, withVariant } from './handEdits.ts';
 
 const action = (words: string, key: string, act: () => void, name = words): HTMLElement =>
@@ -44,8 +45,9 @@ export function byHand(
       : kept.depthM === null
         ? `${name}, the reference, is kept by hand: its supports stay where you put them, its depth is that of least cost.`
         : `${name}, the reference, is kept by hand: its supports stay where you put them, and its depth of ${level(kept.depthM)} m.`;
+  const asked = kept === undefined ? [] : askedWords(kept);
   return [
-    h('p', { class: 'prose' }, said),
+    h('p', { class: 'prose' }, said, asked.length > 0 && ` Asked of it: ${listed(asked)}.`),
     h('p', { class: 'list-actions' }, [
       kept !== undefined && giveBack(kept, store),
       kept !== undefined &&
@@ -53,30 +55,13 @@ export function byHand(
         action('Depth of least cost', 'depth.free', () =>
           store.edit((study) => withDepth(study, option, null), { what: 'freeing the depth' }),
         ),
-      made(option, kept, store),
+      kept?.variant !== undefined &&
+        action('Back to what the form finds', 'made.free', () =>
+          store.edit((study) => withVariant(study, option, null), { what: 'how it is made' }),
+        ),
       locks,
     ]),
   ];
-}
-
-/** Where an option is not made plainly, to have it plain; where that was chosen by hand, to leave it to least cost again. */
-function made(option: AppraisedOption, kept: KeptOption | undefined, store: StudyStore): HtmlChild {
-  if (kept?.variant !== undefined)
-    return action('Made as costs least', 'made.free', () =>
-      store.edit((study) => withVariant(study, option, null), { what: 'freeing how it is made' }),
-    );
-  const { variant = {} } = option;
-  if (Object.keys(variant).length === 0) return false;
-  const without = [
-    ...(variant.haunchRatio === undefined ? [] : ['haunch']),
-    ...(variant.substringers ? ['substringers'] : []),
-    ...(variant.transverse ? ['tendons across'] : []),
-    ...(variant.struts ? ['struts'] : []),
-    ...(variant.ribs ? ['ribs'] : []),
-  ].join(' and ');
-  return action(`Make it without ${without}`, 'made.plain', () =>
-    store.edit((study) => withVariant(study, option, {}), { what: `leaving out ${without}` }),
-  );
 }
 
 const giveBack = ({ number }: KeptOption, store: StudyStore): HTMLElement =>

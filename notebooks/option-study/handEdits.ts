@@ -3,14 +3,15 @@ import {
   PIER_HALF_WIDTH_M,
   survey,
   type AppraisedOption,
+  type AskedVariant,
   type KeptOption,
   type Study,
   type Unit,
-  type Variant,
 } from '../../lib/index.ts';
 import { fixed } from '../format.ts';
 import { supportName } from '../drawing/alongOption.ts';
 import { putAt } from '../page/place.ts';
+import { laidOn } from './spanChoices.ts';
 
 /** The option as the study keeps it by hand; as it stands, with the depth left open, where it is not kept yet. */
 export function keptOf({ options }: Study, option: AppraisedOption): KeptOption {
@@ -55,7 +56,7 @@ export function withPier(study: Study, option: AppraisedOption, index: number, c
   const [before, here, after] = [places[index - 1], places[index], places[index + 1]];
   if (before === undefined || here === undefined || after === undefined) return study;
   const to = Math.min(Math.max(chainageM, before + 1), after - 1);
-  return withKept(study, { ...kept, units: moved(kept.units, here, to) });
+  return withKept(study, laidOn(kept, moved(kept.units, here, to)));
 }
 
 /** What comes of something that was asked for by hand: the study, or why it cannot be had. */
@@ -90,7 +91,7 @@ export function withAbutment(study: Study, option: AppraisedOption, end: End, ch
       why: `at least ${fixed(1, 1)} m short of ${neighbour}, which stands at ${fixed(next, 1)}`,
     };
   }
-  return { ok: true, study: withKept(study, { ...kept, units: moved(kept.units, here, chainageM) }) };
+  return { ok: true, study: withKept(study, laidOn(kept, moved(kept.units, here, chainageM))) };
 }
 
 /**
@@ -122,7 +123,7 @@ export function withSpan(study: Study, option: AppraisedOption, span: number, le
   }
   return {
     ok: true,
-    study: withKept(study, { ...kept, units: moved(kept.units, places[end]!, target) }),
+    study: withKept(study, laidOn(kept, moved(kept.units, places[end]!, target))),
   };
 }
 
@@ -130,8 +131,8 @@ export function withSpan(study: Study, option: AppraisedOption, span: number, le
 export const withDepth = (study: Study, option: AppraisedOption, depthM: number | null): Study =>
   withKept(study, { ...keptOf(study, option), depthM });
 
-/** The study with the way an option is made chosen by hand; null leaves it to least cost again. */
-export function withVariant(study: Study, option: AppraisedOption, variant: Variant | null): Study {
+/** The study with the way an option is asked to be made; null leaves it to least cost again. */
+export function withVariant(study: Study, option: AppraisedOption, variant: AskedVariant | null): Study {
   const { variant: _before, ...kept } = keptOf(study, option);
   return withKept(study, { ...kept, ...(variant !== null && { variant }) });
 }

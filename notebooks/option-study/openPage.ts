@@ -1,4 +1,11 @@
-import { readStudy, sentence, writeStudy, type Problem, type Study } from '../../lib/index.ts';
+import {
+  choiceProblems,
+  readStudy,
+  sentence,
+  writeStudy,
+  type Problem,
+  type Study,
+} from '../../lib/index.ts';
 import { exampleNamed } from '../exampleNames.ts';
 import { workedExample } from '../examples.ts';
 import { h } from '../html.ts';
@@ -39,10 +46,13 @@ import { studyCells } from './studyCells.ts';
 import { studyWhereFrom } from './whereFrom.ts';
 import { answerWords, nextWords, pricesWords } from './words.ts';
 
-/** What is wrong with a study; nothing when it is valid. Read back from its own text, as a file would be. */
-function check(study: Study): readonly Problem[] {
+/**
+ * What is wrong with a study that follows on another; nothing when it is valid. Read back from its own text, as a file would
+ * be; what is newly asked of an option must be something its form can be.
+ */
+function check(study: Study, before: Study): readonly Problem[] {
   const read = readStudy(writeStudy(study));
-  return read.ok ? [] : read.problems;
+  return read.ok ? choiceProblems(study, before) : read.problems;
 }
 
 const query = new URLSearchParams(location.search);

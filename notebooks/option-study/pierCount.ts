@@ -3,6 +3,7 @@ import { supportName } from '../drawing/alongOption.ts';
 import { formLooks } from '../forms/formLook.ts';
 import { fixed } from '../format.ts';
 import { keptOf, placesOf, SAME_M, withKept, type Changed } from './handEdits.ts';
+import { laidOn } from './spanChoices.ts';
 
 /** Shortest span that is left beside a new pier, m. */
 const LEAST_SPAN_M = 2;
@@ -60,8 +61,7 @@ export function withPierAdded(
   return {
     ok: true,
     study: withKept(study, {
-      ...kept,
-      units: kept.units.with(home, wider),
+      ...laidOn(kept, kept.units.with(home, wider)),
       ...locks(renumbered(locked, span + 1, 1)),
     }),
   };
@@ -90,8 +90,7 @@ export function withPierRemoved(study: Study, option: AppraisedOption, index: nu
   return {
     ok: true,
     study: withKept(study, {
-      ...kept,
-      units: kept.units.with(kept.units.indexOf(home), narrower),
+      ...laidOn(kept, kept.units.with(kept.units.indexOf(home), narrower)),
       ...locks(renumbered(locked, index, -1)),
     }),
   };

@@ -14,6 +14,7 @@ const stations: readonly (readonly [path: RegExp, station: string])[] = [
   [/^standing\/within\//u, '7+020'],
   [/^standing\/(?:odds|groups)\//u, '7+030'],
   [/^standing\/leader$/u, '10+010'],
+  [/^kept\/|^options\/\d+\/variant\//u, '3+010'],
   [/^options\/\d+\/(?:units|supports)\//u, '3+020'],
   [/^options\/\d+\/(?:profile|headroom|depthM|over)\//u, '4+010'],
   [/^options\/\d+\/designs\/\d+\/(?:checks|depthM|limitingCheck|task)\//u, '5+010'],

@@ -1,7 +1,7 @@
 import type { Problem, Study } from '../../lib/index.ts';
 import { h } from '../html.ts';
 import type { HtmlChild } from '../html.ts';
-import type { Graph } from '../reactive/index.ts';
+import type { Cell, Graph } from '../reactive/index.ts';
 import { exchange } from './exchange.ts';
 import type { Fields } from './fields.ts';
 import { fieldsOf } from './fields.ts';
@@ -11,6 +11,8 @@ import type { StudyStore } from './store.ts';
 export interface StandingSpec {
   /** What the sentences hang on besides their figures: how many of a kind there are, what is known. Plain data. */
   readonly shape: (draft: Study) => unknown;
+  /** Cells besides the draft that its shape hangs on. */
+  readonly follows?: readonly Cell<unknown>[];
   readonly build: (draft: Study, fields: Fields) => HtmlChild;
   /** A problem in words. */
   readonly say: (problem: Problem) => string;
@@ -20,7 +22,7 @@ export interface StandingSpec {
 export function standing(
   graph: Graph,
   store: StudyStore,
-  { shape, build, say }: StandingSpec,
+  { shape, follows = [], build, say }: StandingSpec,
 ): { readonly element: HTMLElement; readonly end: () => void } {
   const element = h('div', { class: 'standing' });
   let fields: Fields | undefined;
@@ -43,15 +45,18 @@ export function standing(
     // Once the focus has come to where it goes: that place has to be there still.
     if (built === undefined) setTimeout(show);
   });
-  const stop = graph.watch(store.draft, (state) => {
-    if (state.state !== 'ready') return;
-    draft = state.value;
-    show();
-  });
+  const stops = [
+    graph.watch(store.draft, (state) => {
+      if (state.state !== 'ready') return;
+      draft = state.value;
+      show();
+    }),
+    ...follows.map((cell) => graph.watch(cell, show)),
+  ];
   return {
     element,
     end() {
-      stop();
+      for (const stop of stops) stop();
       for (const one of [...earlier, fields]) one?.end();
     },
   };

@@ -69,18 +69,18 @@ const headOf = ({ format, version, title, reference, notice }: Study): Head => (
  * The study of a page, kept in a graph: the draft, the last valid study in slices, what is wrong, and a history of
  * everything. Its inputs are named 'head', 'brief', 'books', 'options', 'priorities', 'notes', 'decision', 'draft',
  * 'problems' and 'history', and are defined here, so it comes before the cells of the page.
- * @param check what is wrong with a study; nothing when it is valid
+ * @param check what is wrong with a study that follows on the last valid one, itself where it is opened; nothing when it is valid
  * @param mayChange whether the study may be changed here; while it may not, edits, undo and redo do nothing
  * @throws when the study it starts with is not valid
  */
 export function studyStore(
   graph: Graph,
   study: Study,
-  check: (study: Study) => readonly Problem[],
+  check: (study: Study, before: Study) => readonly Problem[],
   mayChange: () => boolean = () => true,
 ): StudyStore {
   const checkOpening = (opened: Study): void => {
-    const [first] = check(opened);
+    const [first] = check(opened, opened);
     if (first === undefined) return;
     throw new Error(
       `study: expected a valid one, received one with ${first.path.join('.')} ${first.received}; check it before opening`,
@@ -135,9 +135,9 @@ export function studyStore(
     });
   };
 
-  const take = (next: Study): void => {
+  const take = (next: Study, before = valid): void => {
     draft = next;
-    problems = share(problems, check(draft));
+    problems = share(problems, check(draft, before));
     tell();
   };
 
@@ -202,7 +202,8 @@ export function studyStore(
       isOpen = false;
       done = [];
       undone = [];
-      take(share(draft, opened));
+      const next = share(draft, opened);
+      take(next, next);
     },
 
     valid: () => valid,

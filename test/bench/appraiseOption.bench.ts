@@ -10,7 +10,7 @@ import { memory, type Memory } from '../../lib/appraise/memory.ts';
 import { finish } from '../../lib/appraise/work.ts';
 import { workbench } from '../../lib/appraise/workbench.ts';
 import { formModule } from '../../lib/forms/index.ts';
-import type { FormId, Option } from '../../lib/model/index.ts';
+import type { FormId, MadeOption } from '../../lib/model/index.ts';
 import { lowFerry } from '../appraise/studies.ts';
 
 /** Supports of the worked example: its usual five spans, and one that a short form can reach. */
@@ -74,7 +74,7 @@ describe('one option to P50', () => {
   for (const [form, supportsM, depthM] of cases) {
     const [method] = formModule(form).methods;
     const places = supportsM.map((x) => startM + (x * (endM - startM)) / supportsM.at(-1)!);
-    const option: Option = {
+    const option: MadeOption = {
       number: 1,
       form,
       method,

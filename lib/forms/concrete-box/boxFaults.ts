@@ -39,7 +39,7 @@ export function checkBoxTask(task: Asked): void {
 
 const launchedLight: Problem = {
   code: 'refused',
-  path: ['light'],
+  path: ['light', 'densityKgM3'],
   expected: 'a deck that is cast in its place',
   received: 'one that is launched',
   remedy: 'Leave the lightweight concrete out: it is not followed over the launching piers',
