@@ -165,7 +165,7 @@ export function choiceTable(graph: Graph, store: StudyStore, { reference }: Stud
         cell.replaceChildren(...h('span', {}, madeWords(worked, key, field)).childNodes);
     };
     sayMade(first);
-    const head = ['choice', 'asked for', 'as worked out'];
+    const head = ['choice', 'asked for', 'worked out'];
     const details = h(
       'details',
       { class: 'behind choices', open: isUnfolded },

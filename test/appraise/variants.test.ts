@@ -1,11 +1,20 @@
 import { describe, expect, it } from 'vitest';
 import { workOption } from '../../lib/appraise/cheapestOption.ts';
-import { keptUnits } from '../../lib/appraise/keptUnits.ts';
+import { choiceFaults, keptUnits } from '../../lib/appraise/keptUnits.ts';
 import { memory } from '../../lib/appraise/memory.ts';
 import { finish } from '../../lib/appraise/work.ts';
 import { workbench, type Workbench } from '../../lib/appraise/workbench.ts';
 import { girderVariants } from '../../lib/forms/composite-i/girderVariants.ts';
-import { appraiseKept, survey, type Design, type Option, type Study, type Variant } from '../../lib/index.ts';
+import {
+  appraiseKept,
+  asMade,
+  survey,
+  type AskedVariant,
+  type Design,
+  type Option,
+  type Study,
+  type Variant,
+} from '../../lib/index.ts';
 import { expectedLines } from '../../lib/substructure/index.ts';
 import { lowFerry } from './studies.ts';
 import { answerTo } from './answerTo.ts';
@@ -47,7 +56,7 @@ function channel(lanes: number, mainM: number): Study {
   };
 }
 
-const optionOn = (mainM: number, variant?: Variant): Option => ({
+const optionOn = (mainM: number, variant?: AskedVariant): Option => ({
   number: 1,
   form: 'composite-i',
   method: 'crane',
@@ -63,7 +72,7 @@ const optionOn = (mainM: number, variant?: Variant): Option => ({
   ...(variant && { variant }),
 });
 
-const boxOn = (mainM: number, variant?: Variant): Option => {
+const boxOn = (mainM: number, variant?: AskedVariant): Option => {
   const { units, ...rest } = optionOn(mainM, variant);
   const boxes = units.map((unit) => ({ ...unit, form: 'concrete-box' as const }));
   return { ...rest, form: 'concrete-box', method: 'falsework', units: boxes };
@@ -129,6 +138,40 @@ describe('workOption(wide concrete box whose way of making is open)', () => {
   });
 });
 
+describe('workOption(option of which some ways of making are open)', () => {
+  const bench = workbench(channel(6, 75));
+  const madeOf = (asked?: AskedVariant) => finish(workOption(bench, boxOn(75, asked))).option;
+
+  it('keeps what is asked and makes the rest as costs least', () => {
+    const strong = madeOf({ strengthMPa: 50, struts: 'unknown', ribs: 'unknown', transverse: 'unknown' });
+    expect(strong.variant).toEqual({ strengthMPa: 50, struts: true });
+    expect(strong.designs[0]!.task).toMatchObject({ strengthMPa: 50, struts: true });
+    const across = madeOf({ transverse: true, struts: 'unknown' });
+    expect(across.variant!.transverse).toBe(true);
+    expect(bench.costOf(across.lines)).toBeLessThanOrEqual(
+      bench.costOf(madeOf({ transverse: true }).lines) * (1 + 1e-9),
+    );
+  });
+
+  it('makes nothing that was ruled out, and all of it open is as if nothing was asked', () => {
+    const without = madeOf({ ribs: 'unknown', transverse: 'unknown' });
+    expect(without.variant!.struts).toBeUndefined();
+    const open = madeOf({ struts: 'unknown', ribs: 'unknown', transverse: 'unknown' });
+    expect(open.variant).toEqual(madeOf().variant);
+  });
+
+  it.each([
+    [undefined, { struts: true }, { struts: true }],
+    [{ struts: 'unknown', boxWidthM: 5 }, { struts: true }, { struts: true, boxWidthM: 5 }],
+    [{ struts: 'unknown', boxWidthM: 5 }, {}, { boxWidthM: 5 }],
+    [{ ribs: true, struts: 'unknown' }, { struts: true }, null],
+    [{}, { struts: true }, null],
+    [{ haunchRatio: 1.6 }, { haunchRatio: 2 }, null],
+  ] as const)('asMade(%o, %o) is %o', (asked, made, expected) => {
+    expect(asMade(asked, made)).toEqual(expected);
+  });
+});
+
 describe('workOption(variant that was chosen)', () => {
   it('keeps to it, in depth, drawing and price', () => {
     const bench = workbench(channel(2, 60));
@@ -182,6 +225,18 @@ describe('workOption(variant that was chosen)', () => {
     expect(keptUnits(site, { form: 'concrete-box', method: 'falsework', units, variant })).toMatchObject({
       because: [expect.stringMatching(said)],
     });
+  });
+
+  it('is refused where a haunch has no inner support to be over', () => {
+    const site = survey(lowFerry().brief);
+    const units = [
+      { form: 'composite-i', role: 'main', supportsM: [site.startM, site.startM + 60] },
+    ] as const;
+    const asked = { form: 'composite-i', method: 'crane', variant: { haunchRatio: 1.6 } } as const;
+    expect(choiceFaults(site, { ...asked, units })).toMatchObject([{ path: ['haunchRatio'] }]);
+    const [{ form, role, supportsM }] = units;
+    const two = [{ form, role, supportsM: [...supportsM, site.startM + 120] }];
+    expect(choiceFaults(site, { ...asked, units: two })).toEqual([]);
   });
 
   it('is refused where the form has none', () => {

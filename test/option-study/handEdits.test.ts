@@ -1,5 +1,25 @@
 import { describe, expect, it } from 'vitest';
-import { appraise, appraiseKept, memory, readStudy, writeStudy, type Study } from '../../lib/index.ts';
+import {
+  appraise,
+  appraiseKept,
+  choiceProblems,
+  memory,
+  readStudy,
+  writeStudy,
+  type AppraisedOption,
+  type Study,
+} from '../../lib/index.ts';
+import { formChoices, type FigureField } from '../../notebooks/forms/formChoices.ts';
+import {
+  askedFigure,
+  askedWords,
+  choicesOf,
+  mainSpans,
+  wayOf,
+  withAskedFigure,
+  withWay,
+} from '../../notebooks/option-study/choiceEdits.ts';
+import { withPierAdded, withPierRemoved } from '../../notebooks/option-study/pierCount.ts';
 import {
   handEdit,
   keptOf,
@@ -216,5 +236,133 @@ describe('handEdit(key, option)', () => {
     expect(withObstacleEdge(study, index, 'from', fromM - 2).brief.obstacles[index]!.clearance!.fromM).toBe(
       fromM + 1,
     );
+  });
+});
+
+describe('choices of a form, asked of an option', () => {
+  const boxes: Study = { ...lowFerry, options: { ...lowFerry.options, forms: ['concrete-box'] } };
+  const answer = appraise(boxes, kept);
+  const box = answer.options[0]!;
+  const study: Study = { ...boxes, options: { ...boxes.options, register: answer.register } };
+  const [width] = formChoices.boxWidthM.fields as [FigureField];
+  const [density, middle] = formChoices.light.fields as [FigureField, FigureField];
+  const [ballast] = formChoices.ballastKNm.fields as [FigureField];
+  const [haunch] = formChoices.haunchRatio.fields as [FigureField];
+  const variantIn = (from: Study, of: AppraisedOption = box) =>
+    from.options.kept.find(({ number }) => number === of.number)?.variant;
+  const wide = withAskedFigure(study, box, width, 6);
+
+  it('are those that the form has, each with a field', () => {
+    expect(choicesOf('concrete-box')).toEqual([
+      'transverse',
+      'struts',
+      'ribs',
+      'boxWidthM',
+      'strengthMPa',
+      'light',
+      'ballastKNm',
+    ]);
+    expect(choicesOf('composite-i')).toEqual(['haunchRatio', 'substringers']);
+    expect(choicesOf('truss')).toEqual([]);
+  });
+
+  it('keep the option as the reference, leave the other ways to the search, and are read back', () => {
+    expect(askedFigure(study, box, width)).toBe('unknown');
+    expect(wide.options.reference).toBe(box.number);
+    expect(askedFigure(wide, box, width)).toBe(6);
+    expect(variantIn(wide)).toEqual({
+      boxWidthM: 6,
+      transverse: 'unknown',
+      struts: 'unknown',
+      ribs: 'unknown',
+    });
+    const read = readStudy(writeStudy(wide));
+    expect(read.ok && read.value.options.kept).toEqual(wide.options.kept);
+    expect(askedWords(wide.options.kept[0]!)).toEqual(['box 6.00 m wide between its webs']);
+  });
+
+  it('are worked out at once and by the search, and are said to come from where they were typed', () => {
+    expect(appraiseKept(wide, box, kept).option!.designs[0]!.task.boxWidthM).toBe(6);
+    const mine = appraise(wide, kept).options.find(({ number }) => number === box.number)!;
+    expect(mine.variant).toMatchObject({ boxWidthM: 6 });
+    expect(mine.cost).not.toEqual(box.cost);
+  });
+
+  it('are given back one by one; with the last the option is made as the form finds', () => {
+    const both = withWay(wide, box, 'ribs', 'without');
+    expect(wayOf(both, box, 'ribs')).toBe('without');
+    expect(askedWords(both.options.kept[0]!)).toEqual(['box 6.00 m wide between its webs', 'no ribs']);
+    const one = withAskedFigure(both, box, width, 'unknown');
+    expect(variantIn(one)).toEqual({ transverse: 'unknown', struts: 'unknown' });
+    expect(variantIn(withWay(one, box, 'ribs', 'unknown'))).toBeUndefined();
+    expect(withWay(study, box, 'ribs', 'unknown')).toBe(study);
+    expect(withAskedFigure(study, box, width, 'unknown')).toBe(study);
+  });
+
+  it('that cannot be are told at their places, only where they are newly asked', () => {
+    const far = withAskedFigure(study, box, width, 40);
+    const [problem, ...others] = choiceProblems(far, study);
+    expect(problem).toMatchObject({
+      path: ['options', 'kept', 0, 'variant', 'boxWidthM'],
+      received: '40',
+      unit: 'm',
+    });
+    expect(others).toEqual([]);
+    expect(choiceProblems(wide, study)).toEqual([]);
+    expect(choiceProblems(far, far)).toEqual([]);
+    const ribbed = withWay(withWay(study, box, 'ribs', 'with'), box, 'struts', 'with');
+    expect(choiceProblems(ribbed, study).map(({ path }) => path.at(-1))).toEqual(['ribs']);
+  });
+
+  it('a haunch of 1 is a constant depth, and none is made over a single span', () => {
+    const plain = withAskedFigure(numbered, option, haunch, 1);
+    expect(variantIn(plain, option)).toEqual({ substringers: 'unknown' });
+    expect(askedFigure(plain, option, haunch)).toBe(1);
+    expect(askedWords(plain.options.kept[0]!)).toEqual(['constant depth']);
+    const deep = withAskedFigure(plain, option, haunch, 1.6);
+    expect(variantIn(deep, option)).toEqual({ haunchRatio: 1.6, substringers: 'unknown' });
+    expect(choiceProblems(deep, plain)).toEqual([]);
+    const single = start.slice(1, -1).reduce((left) => {
+      const fewer = withPierRemoved(left, option, 1);
+      return fewer.ok ? fewer.study : left;
+    }, deep);
+    expect(mainSpans(single, option)).toHaveLength(1);
+    expect(choiceProblems(single, numbered).map(({ path }) => path.at(-1))).toEqual(['haunchRatio']);
+  });
+
+  it('a figure by span begins from the usual one and goes when all spans have that again', () => {
+    const spans = mainSpans(study, box);
+    const light = withAskedFigure(study, box, density, 1800);
+    const middles = withAskedFigure(light, box, middle, 20, 1);
+    expect(variantIn(middles)).toMatchObject({
+      light: { densityKgM3: 1800, middleM: spans.map((span, i) => (i === 1 ? 20 : span)) },
+    });
+    expect(askedFigure(middles, box, middle, 0)).toBe('unknown');
+    expect(variantIn(withAskedFigure(middles, box, middle, 'unknown', 1))).toEqual(variantIn(light));
+    expect(variantIn(withAskedFigure(middles, box, density, 'unknown'))).toBeUndefined();
+    const loaded = withAskedFigure(study, box, ballast, 60, 0);
+    expect(variantIn(loaded)).toMatchObject({ ballastKNm: spans.map((_, i) => (i === 0 ? 60 : 0)) });
+    expect(variantIn(withAskedFigure(loaded, box, ballast, 0, 0))).toBeUndefined();
+  });
+
+  it('figures by span go along where supports are moved, added and taken away', () => {
+    const light = withAskedFigure(withAskedFigure(study, box, density, 1800), box, middle, 20, 1);
+    const loaded = withAskedFigure(light, box, ballast, 60, 0);
+    const pier = mainSpans(study, box)[0]!;
+    const moved = withPier(loaded, box, 1, box.supports[1]!.chainageM - 4);
+    expect(mainSpans(moved, box)[0]).toBeCloseTo(pier - 4, 9);
+    expect(askedFigure(moved, box, middle, 0)).toBe('unknown');
+    expect(askedFigure(moved, box, middle, 1)).toBe(20);
+    expect(choiceProblems(moved, study)).toEqual([]);
+    const added = withPierAdded(loaded, box, 0);
+    if (!added.ok) throw new Error(added.why);
+    expect([0, 1, 2].map((span) => askedFigure(added.study, box, ballast, span))).toEqual([
+      60,
+      60,
+      'unknown',
+    ]);
+    expect(choiceProblems(added.study, study)).toEqual([]);
+    const fewer = withPierRemoved(added.study, box, 1);
+    expect(fewer.ok && variantIn(fewer.study)).toEqual(variantIn(loaded));
   });
 });
