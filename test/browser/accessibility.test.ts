@@ -44,6 +44,8 @@ describe('the option study', () => {
     const { page } = study;
     await page.setViewportSize({ width, height: 900 });
     await settled(page);
+    await page.locator('details.choices').evaluate((fold: HTMLDetailsElement) => (fold.open = true));
+    await page.locator('.choices [role="spinbutton"]').first().scrollIntoViewIfNeeded();
     expect(await faultsOf(page)).toEqual([]);
   });
 });

@@ -269,6 +269,49 @@ describe('by hand', () => {
     );
   });
 
+  it('a choice of the form is asked for, refused with the reason, undone and given back', async () => {
+    const cell = page.locator('[id="3+010"]');
+    const row = page.locator(`${STACK} [data-option]`, { hasText: 'Concrete box' }).first();
+    await row.click({ position: { x: 200, y: 10 } });
+    await cell.getByText('(Concrete box), the reference').waitFor();
+    await settled(page);
+    await cell.locator('summary').click();
+    const width = cell.getByRole('spinbutton', { name: 'width of the box between its outer webs, m' });
+    const asked = 'Asked of it: box 6.20 m wide between its webs.';
+    const type = async (text: string): Promise<void> => {
+      await width.focus();
+      await page.keyboard.type(text);
+      await page.keyboard.press('Enter');
+    };
+    expect(await width.textContent()).toBe('as its cells ask');
+    await type('6.2');
+    await cell.getByText(asked).waitFor();
+    await settled(page);
+    expect(await textOf(`${STACK} .row.reference`)).toContain('box 6.20 m wide between its webs');
+    await undoIs('Undo width of the box between its outer webs');
+    await cell.locator('td [data-figure$="variant/boxWidthM"]').click();
+    await cell.getByText('width of the box, asked for the option').waitFor();
+    await page.keyboard.press('Escape');
+
+    await type('40');
+    await cell.getByText(/Expected 2\.5 to 11\.\d+ m, not 40 m/u).waitFor();
+    expect(await width.getAttribute('aria-invalid')).toBe('true');
+    await settled(page);
+    expect(await textOf('[id="3+010"]')).toContain(asked);
+    await page.getByRole('button', { name: 'Undo', exact: true }).click();
+    expect(await width.textContent()).toBe('6.20');
+    expect(await width.getAttribute('aria-invalid')).toBeNull();
+
+    await cell
+      .getByRole('button', {
+        name: 'give back width of the box between its outer webs to what the form finds',
+      })
+      .click();
+    await cell.getByText(asked).waitFor({ state: 'detached' });
+    expect(await width.textContent()).toBe('as its cells ask');
+    expect(await textOf('[id="3+010"]')).toContain('is kept by hand');
+  });
+
   it('a form that a rule puts out is worked out anyway, and left out again', async () => {
     await openAsFile(page, exampleOf(['composite-i', 'slab']));
     await page.waitForFunction(() =>

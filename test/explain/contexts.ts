@@ -1,4 +1,4 @@
-import type { KeptOption, Study, Variant } from '../../lib/index.ts';
+import type { AskedVariant, KeptOption, Study } from '../../lib/index.ts';
 import type { Context } from '../../lib/explain/index.ts';
 import { levelCrossing } from '../appraise/levelCrossing.ts';
 import { lowFerry } from '../appraise/studies.ts';
@@ -189,7 +189,7 @@ export const variants = (): Context =>
       'concrete-box': 'falsework',
       'cantilever-box': 'balanced-cantilever',
     } as const;
-    const kept = (number: number, form: keyof typeof methods, variant: Variant): KeptOption => ({
+    const kept = (number: number, form: keyof typeof methods, variant: AskedVariant): KeptOption => ({
       number,
       form,
       method: methods[form],
@@ -217,6 +217,7 @@ export const variants = (): Context =>
         workOutAnyway: ['composite-i', 'concrete-box', 'cantilever-box'],
         kept: [
           kept(40, 'composite-i', { haunchRatio: 1.6, substringers: true }),
+          kept(47, 'composite-i', { haunchRatio: 'unknown', substringers: true }),
           kept(41, 'concrete-box', { transverse: true }),
           kept(42, 'concrete-box', { struts: true }),
           kept(43, 'cantilever-box', { struts: true }),
