@@ -22,8 +22,10 @@ interface FigureOf {
 }
 interface FigureChoice extends FigureOf {
   readonly kind: 'figure';
-  /** The value that is the plain way. */
+  /** The value that is the plain way, and the least. */
   readonly plain?: number;
+  /** The most that a study file may say, where the form itself has nothing against it. */
+  readonly most?: number;
   /** What it comes to in a unit of which it is not asked, and the figures of the design that it is told from. */
   readonly found?: (figures: Readonly<Record<string, number>>) => Found | undefined;
 }
@@ -69,6 +71,7 @@ export const formChoices: Readonly<Record<keyof Variant, FormChoice>> = {
         from: 1.5,
         empty: 'as costs least',
         plain: 1,
+        most: 4,
       },
     ],
     said: ({ haunchRatio = 1 }) => `${fixed(haunchRatio, 2)} times as deep over piers as at midspan`,

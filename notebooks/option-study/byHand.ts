@@ -57,7 +57,7 @@ export function byHand(
         ),
       kept?.variant !== undefined &&
         action('Back to what the form finds', 'made.free', () =>
-          store.edit((study) => withVariant(study, option, null), { what: 'how it is made' }),
+          store.edit((study) => withVariant(study, option, null), { what: 'giving back how it is made' }),
         ),
       locks,
     ]),

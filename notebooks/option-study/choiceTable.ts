@@ -71,16 +71,19 @@ function fieldOf(fields: Fields, asked: Asked, field: ChoiceField, spans: readon
       ],
     });
   const { label, unit, places, step, from, empty } = field;
-  const least = (field.kind === 'figure' && field.plain) || 0;
   const rules = {
     places,
     step,
     from,
     unknown: empty,
-    min: { value: least },
+    min: { value: 0 },
     ...(unit !== undefined && { unit }),
   };
-  if (field.kind === 'figure') return fields.figure(figureMade(asked, field), { label, ...rules });
+  if (field.kind === 'figure') {
+    const { plain: least = 0, most } = field;
+    const limits = { min: { value: least }, ...(most !== undefined && { max: { value: most } }) };
+    return fields.figure(figureMade(asked, field), { label, ...rules, ...limits });
+  }
   return spans.map((name, span) =>
     h(
       'span',
@@ -131,12 +134,19 @@ export function choiceTable(graph: Graph, store: StudyStore, { reference }: Stud
     const state = graph.state(reference);
     return 'value' in state ? state.value : null;
   };
+  /** As it was last worked out: a kept option that the brief has left no way to be made is still asked to be made otherwise. */
+  let seen: AppraisedOption | null = null;
+  const inHand = ({ options }: Study): AppraisedOption | null => {
+    const held = now();
+    if (held !== null) seen = held;
+    return held ?? (options.kept.some(({ number }) => number === seen?.number) ? seen : null);
+  };
   let isUnfolded = false;
-  /** Says how the reference comes out, in the table as it stands. */
-  let sayMade: (option: AppraisedOption) => void = () => {};
+  /** Says how the reference comes out, in the table as it stands; nothing where it cannot be worked out. */
+  let sayMade: (option: AppraisedOption | null) => void = () => {};
 
   function build(study: Study, fields: Fields): HtmlChild {
-    const first = now();
+    const first = inHand(study);
     if (first === null) return null;
     const choices = choicesOf(first.form);
     if (choices.length === 0) return null;
@@ -160,11 +170,11 @@ export function choiceTable(graph: Graph, store: StudyStore, { reference }: Stud
       }),
     );
     sayMade = (worked) => {
-      if (worked.number !== first.number) return;
+      if (worked !== null && worked.number !== first.number) return;
       for (const [cell, key, field] of made)
-        cell.replaceChildren(...h('span', {}, madeWords(worked, key, field)).childNodes);
+        cell.replaceChildren(...h('span', {}, worked && madeWords(worked, key, field)).childNodes);
     };
-    sayMade(first);
+    sayMade(now());
     const head = ['choice', 'asked for', 'worked out'];
     const details = h(
       'details',
@@ -192,13 +202,13 @@ export function choiceTable(graph: Graph, store: StudyStore, { reference }: Stud
   }
 
   graph.watch(reference, (state) => {
-    if (state.state === 'ready' && state.value !== null) sayMade(state.value);
+    if (state.state === 'ready') sayMade(state.value);
   });
   return standing(graph, store, {
     say: problemBeside,
     follows: [reference],
     shape(study) {
-      const option = now();
+      const option = inHand(study);
       if (option === null) return null;
       const fields = choicesOf(option.form).map((key) => shownFields(study, option, key).length);
       return [option.number, option.form, placeOf(study, option), spanNames(option), fields];

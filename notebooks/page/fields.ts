@@ -13,7 +13,7 @@ import type { StudyStore } from './store.ts';
 import type { WordsSpec } from './wordsInput.ts';
 import { wordsInput } from './wordsInput.ts';
 
-type Bound = 'value' | 'input' | 'change' | 'key' | 'origin';
+type Bound = 'value' | 'input' | 'change' | 'drop' | 'key' | 'origin';
 
 /** Where the origin of a field is read from; every field counts as typed unless it says otherwise. */
 export interface FieldOptions {
@@ -140,6 +140,7 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
         key: entry.key,
         input: put(entry, spec.label),
         change: store.endStep,
+        drop: store.dropStep,
       });
       const words = (value: Figure): string =>
         writeFigure(value === 'unknown' ? value : value * (spec.per ?? 1), spec);

@@ -84,6 +84,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
   const goBack = (): void => {
     stopTyping();
     unrefuse();
+    if (isTold) spec.drop?.();
     move(before);
     origin = originBefore;
     keep();

@@ -25,6 +25,8 @@ export interface FigureSpec extends FigureRules {
   readonly input?: (value: Figure) => void;
   /** Once at the end of each go that was told by `input`, also when it came back to where it began. */
   readonly change?: (value: Figure) => void;
+  /** Takes back whatever `input` has told in this go, where more hangs on a value than the value itself. */
+  readonly drop?: () => void;
   /** Enter on a preset that was left as it is. */
   readonly confirm?: () => void;
 }

@@ -284,6 +284,13 @@ describe('by hand', () => {
       await page.keyboard.press('Enter');
     };
     expect(await width.textContent()).toBe('as its cells ask');
+    await width.focus();
+    await page.keyboard.press('ArrowUp');
+    await cell.getByText('Asked of it').waitFor();
+    await page.keyboard.press('Escape');
+    await undoIs('Undo reference');
+    await cell.getByText('as the search proposed it').waitFor();
+    expect(await width.textContent()).toBe('as its cells ask');
     await type('6.2');
     await cell.getByText(asked).waitFor();
     await settled(page);
