@@ -156,9 +156,12 @@ export function spanPaths(option: AppraisedOption): (string | undefined)[] {
 export const supportName = (index: number, count: number): string =>
   index === 0 ? 'A' : index === count - 1 ? 'B' : `P${String(index)}`;
 
+/** Height of the parapet as it is drawn, over the road, m. */
+export const PARAPET_M = 1.1;
+
 /** Highest and lowest level of anything an option draws above its foundations, m. */
 export function structureTop(site: Site, option: AppraisedOption): number {
-  let top = roadTop(site, option) + 1.1;
+  let top = roadTop(site, option) + PARAPET_M;
   for (const { design, fromM } of placedUnits(option)) {
     for (const shape of design.elevation) {
       for (const [x, z] of shape.points) top = Math.max(top, slabLevel(site, option, fromM + x) + z);

@@ -1,13 +1,13 @@
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
-import { groundLevel, leastSoffit, lowestSoffit } from './alongOption.ts';
-import type { Asked } from './asked.ts';
+import { groundLevel, leastSoffit, lowestSoffit, PARAPET_M, roadLevel } from './alongOption.ts';
 import { overOf } from './asked.ts';
 import { dimensionChain, figureLines, uprightDimension, type Figure } from './dimension.ts';
 import type { Frame } from './frame.ts';
+import { freeLabel, type Room } from './freeLabel.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
-import type { Box, Placer } from './placer.ts';
+import { IN_THE_WAY, STRUCTURE, type Box, type Placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num, pathOf } from './piece.ts';
 import { length, level } from '../format.ts';
@@ -67,25 +67,31 @@ export function envelopes(site: Site, obstacles?: readonly Obstacle[]): Envelope
     });
 }
 
-/** What is left between an envelope and the soffit, in words, and which figure that is. */
-interface Spare {
-  readonly words: string;
-  readonly figure: Asked;
+/** What is left between an envelope and the soffit, and the chainage at which it is least. */
+interface Spare extends Figure {
+  readonly atM: number;
 }
 
-/** What is left between an envelope and the soffit where it is less than a metre; no words otherwise. */
-function spareOver(site: Site, option: AppraisedOption | null, one: Envelope): Spare {
-  const none = { words: '', figure: undefined };
-  if (option === null) return none;
+/** What is left between an envelope and the soffit where it is less than a metre. */
+function spareOver(
+  site: Site,
+  option: AppraisedOption | null,
+  one: Envelope,
+  accent: string,
+): Spare | undefined {
+  if (option === null) return undefined;
   const places = [0, 0.25, 0.5, 0.75, 1].map((part) => one.fromM + part * (one.toM - one.fromM));
   const spares = places.map((at) => lowestSoffit(site, option, at) - one.topLevelM);
   const least = Math.min(...spares);
-  if (!Number.isFinite(least) || least >= 1) return none;
+  if (!Number.isFinite(least) || least >= 1) return undefined;
   const at = places[spares.indexOf(least)] ?? NaN;
+  const isLow = least < -0.005;
   return {
-    words: least < -0.005 ? `${level(-least)} too low` : `${level(least)} spare`,
+    words: isLow ? `${level(-least)} too low` : `${level(least)} spare`,
+    colour: isLow ? accent : colours.ink,
+    atM: at,
     // Where a flood asks for more than the envelope, what is spare there is another figure.
-    figure: Math.abs(leastSoffit(site, at) - one.topLevelM) < 1e-9 ? overOf(option, at, 'spareM') : undefined,
+    asked: Math.abs(leastSoffit(site, at) - one.topLevelM) < 1e-9 ? overOf(option, at, 'spareM') : undefined,
   };
 }
 
@@ -93,6 +99,9 @@ function spareOver(site: Site, option: AppraisedOption | null, one: Envelope): S
 const LINE_AT_PX = 7;
 /** From the line of an upright dimension to its figure, px. */
 const LINED_PX = 7;
+
+/** Figures beside an envelope may touch the ground or its own outline; what covers more than this is on a pier, px2. */
+const ON_STRUCTURE = STRUCTURE * IN_THE_WAY;
 
 type LineAnchor = 'start' | 'middle' | 'end';
 
@@ -104,15 +113,105 @@ interface Beside {
   readonly box: Box;
 }
 
-/** One envelope: its outline, and its headroom with what is spare, inside it or at the side where there is room. */
-function envelopePiece(
-  frame: Frame,
-  one: Envelope,
-  { words: spare, figure: spareFigure }: Spare,
-  accent: string,
+/** Sides of an envelope on the sheet, px. */
+type Sides = Readonly<Record<'left' | 'right' | 'top' | 'foot', number>>;
+
+/** Headroom of an envelope, and what is spare under it, beside it or within; null where all places are worse than `limit`. */
+function besideEnvelope(
+  { left, right, top, foot }: Sides,
+  headroom: Figure,
+  spare: Figure | undefined,
   room: Placer,
+  limit: number,
+): Piece | Piece[] | null {
+  const widest = Math.max(
+    textWidth(headroom.words, letters.drawing),
+    textWidth(spare?.words ?? '', letters.drawing),
+  );
+  const middle = (top + foot) / 2;
+  const [high, low] = spare === undefined ? [middle - 6, middle + 6] : [middle - 10, middle + 10];
+  const width = right - left;
+  const beside = (x: number, anchor: LineAnchor, isLined: boolean): Beside => {
+    const reach = widest + (isLined ? LINED_PX : 0);
+    const from = anchor === 'middle' ? x - reach / 2 : anchor === 'end' ? x - reach : x;
+    return { x, anchor, isLined, box: { left: from, right: from + reach, top: high, bottom: low } };
+  };
+  const [outer, lined, bare] = [LINE_AT_PX, true, false];
+  const places = [
+    beside(right + outer, 'start', lined),
+    beside(left - outer, 'end', lined),
+    // Within it where it is wide enough, off what crosses below its middle.
+    ...(width > 1.3 * (widest + LINED_PX + outer)
+      ? [beside(right - outer, 'end', lined), beside(left + outer, 'start', lined)]
+      : []),
+    // Without its line where it has no room beside one.
+    ...(width > widest + 8 && foot - top > low - high + 3
+      ? [beside((left + right) / 2, 'middle', bare)]
+      : []),
+    beside(right + 4, 'start', bare),
+    beside(left - 4, 'end', bare),
+  ];
+  const place =
+    places[
+      room.choose(
+        places.map(({ box }) => box),
+        limit,
+      )
+    ];
+  if (place === undefined) return null;
+  const { x, anchor, isLined } = place;
+  return isLined
+    ? uprightDimension(x, top, foot, headroom.words, {
+        ...headroom,
+        side: anchor === 'end' ? 'left' : 'right',
+        under: spare,
+      })
+    : figureLines(x, middle, [headroom, spare], { anchor, halo: true });
+}
+
+/** From the parapet up to lettering over it, and the foot of such lettering to the line that leads down from it, px. */
+const OVER_PX = 4;
+const LEAD_PX = 2;
+
+/** What is spare over an envelope, written over the deck with a line down to where it is least; null where there is no room. */
+function spareOnDeck(
+  option: AppraisedOption,
+  one: Envelope,
+  { words, colour, asked, atM }: Spare,
+  room: Room,
+): Piece | null {
+  const { frame } = room;
+  const x = frame.x(atM);
+  const y = frame.y(roadLevel(option, atM) + PARAPET_M) - OVER_PX;
+  const half = textWidth(words, letters.drawing) / 2;
+  const places = [0, 0.5, -0.5].map((aside) => [x + aside * half, y] as const);
+  const put = freeLabel(room, places, words, { anchor: 'middle', fill: colour, figure: asked }, IN_THE_WAY);
+  return (
+    put &&
+    g(
+      {},
+      el('path', {
+        d: `M${num(x)},${num(y + LEAD_PX)}V${num(frame.y(one.topLevelM))}`,
+        stroke: colour,
+        'stroke-width': pens.fine,
+      }),
+      put,
+    )
+  );
+}
+
+/**
+ * One envelope: its outline, and its headroom with what is spare, within it or at the side. Where there is no room for
+ * both, what is spare stands over the deck, or is left to the data band.
+ */
+function envelopePiece(
+  site: Site,
+  option: AppraisedOption | null,
+  one: Envelope,
+  room: Room,
   isBare: boolean,
 ): Piece {
+  const { frame, placer, accent } = room;
   const left = frame.x(one.fromM);
   const right = frame.x(one.toM);
   const top = frame.y(one.topLevelM);
@@ -135,7 +234,7 @@ function envelopePiece(
   if (isBare) return outline;
   const headroom = (one.topLevelM - one.footLevelM).toFixed(2);
   const inside = `${length(one.toM - one.fromM)} × ${headroom}`;
-  room.takeLine(
+  placer.takeLine(
     [
       [left, foot],
       [left, top],
@@ -146,7 +245,7 @@ function envelopePiece(
     2,
   );
   if (one.water && right - left > textWidth(inside, letters.drawing) + 8 && foot - top > 14) {
-    room.take({ left, right, top, bottom: foot }, 2);
+    placer.take({ left, right, top, bottom: foot }, 2);
     return g(
       {},
       outline,
@@ -160,48 +259,20 @@ function envelopePiece(
       }),
     );
   }
-  const widest = Math.max(textWidth(headroom, letters.drawing), textWidth(spare, letters.drawing));
-  const middle = (top + foot) / 2;
-  const [high, low] = spare === '' ? [middle - 6, middle + 6] : [middle - 11, middle + 12];
-  const width = right - left;
-  const beside = (x: number, anchor: LineAnchor, isLined: boolean): Beside => {
-    const reach = widest + (isLined ? LINED_PX : 0);
-    const from = anchor === 'middle' ? x - reach / 2 : anchor === 'end' ? x - reach : x;
-    return { x, anchor, isLined, box: { left: from, right: from + reach, top: high, bottom: low } };
-  };
-  const [outer, lined, bare] = [LINE_AT_PX, true, false];
-  const places = [
-    beside(right + outer, 'start', lined),
-    beside(left - outer, 'end', lined),
-    // Within it where it is wide enough, off what crosses below its middle.
-    ...(width > 1.3 * (widest + LINED_PX + outer)
-      ? [beside(right - outer, 'end', lined), beside(left + outer, 'start', lined)]
-      : []),
-    // Without its line where it has no room beside one.
-    ...(width > widest + 8 && foot - top > low - high ? [beside((left + right) / 2, 'middle', bare)] : []),
-    beside(right + 4, 'start', bare),
-    beside(left - 4, 'end', bare),
-  ];
-  const { x, anchor, isLined } = places[room.choose(places.map(({ box }) => box))]!;
+  const sides = { left, right, top, foot };
   const figure: Figure = {
     words: headroom,
     colour: accent,
     asked: one.path === undefined ? undefined : `${one.path}/headroomM`,
   };
-  const under: Figure | undefined =
-    spare === ''
-      ? undefined
-      : { words: spare, colour: spare.endsWith('low') ? accent : colours.ink, asked: spareFigure };
+  const spare = spareOver(site, option, one, accent);
   return g(
     {},
     outline,
-    isLined
-      ? uprightDimension(x, top, foot, headroom, {
-          ...figure,
-          side: anchor === 'end' ? 'left' : 'right',
-          under,
-        })
-      : figureLines(x, middle, [figure, under], { anchor, halo: true }),
+    besideEnvelope(sides, figure, spare, placer, ON_STRUCTURE) ?? [
+      besideEnvelope(sides, figure, undefined, placer, Infinity),
+      option !== null && spare !== undefined && spareOnDeck(option, one, spare, room),
+    ],
   );
 }
 
@@ -209,15 +280,13 @@ function envelopePiece(
 export function clearances(
   site: Site,
   option: AppraisedOption | null,
-  frame: Frame,
   list: readonly Envelope[],
-  accent: string,
-  room: Placer,
+  room: Room,
   isBare = false,
 ): Piece {
   return g(
     { class: 'clearances' },
-    list.map((one) => envelopePiece(frame, one, spareOver(site, option, one), accent, room, isBare)),
+    list.map((one) => envelopePiece(site, option, one, room, isBare)),
   );
 }
 

@@ -2,13 +2,12 @@ import { fixed, length, radiusText, signed } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Obstacle, Site } from '../model.ts';
 import { siteOf } from '../model.ts';
-import { roadLevel, soffitLevel, spanPaths, supportChainages } from './alongOption.ts';
+import { PARAPET_M, roadLevel, soffitLevel, spanPaths, supportChainages } from './alongOption.ts';
 import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Asked } from './asked.ts';
 import { ofOption } from './asked.ts';
 import type { Envelope } from './clearances.ts';
 import { barredDimension, barredWash, clearances, envelopes } from './clearances.ts';
-import type { Room } from './crossingLetters.ts';
 import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
 import { datumBelow, datumBox, datumLine } from './datumLine.ts';
@@ -17,6 +16,7 @@ import { chainagesShown, elevationBody, levelRange, optionWords, scaleOnSheet } 
 import { elevationText } from './elevationText.ts';
 import type { Frame } from './frame.ts';
 import { frameOf } from './frame.ts';
+import type { Room } from './freeLabel.ts';
 import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
@@ -91,7 +91,7 @@ function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
   const at = (right: boolean, words: string, figure?: Asked): Piece =>
     label(
       right ? frame.right : frame.left,
-      frame.y(roadLevel(option, right ? frame.toM : frame.fromM) + 1.1) - 8,
+      frame.y(roadLevel(option, right ? frame.toM : frame.fromM) + PARAPET_M) - 8,
       words,
       { fill: colours.second, halo: true, anchor: right ? 'end' : 'start', figure },
     );
@@ -178,7 +178,7 @@ export function crossing(input: CrossingInput): Piece {
     (one) => one.toM > shown.fromM && one.fromM < shown.toM,
   );
   const barred = small ? null : barredPiece(site, option, list, room);
-  const marked = small ? null : clearances(site, option, frame, list, ink.accent, room.placer, widthPx < 480);
+  const marked = small ? null : clearances(site, option, list, room, widthPx < 480);
   const depths = option === null || small ? [] : depthMarks(site, option, room);
   // On a hand-held screen lettering of levels and founding would touch.
   const cramped = small || widthPx < 480;

@@ -4,6 +4,7 @@ import { siteOf } from '../model.ts';
 import {
   depthAt,
   groundLevel,
+  PARAPET_M,
   placedUnits,
   roadLevel,
   slabLevel,
@@ -14,29 +15,20 @@ import {
 import type { Asked } from './asked.ts';
 import { ofOption, overOf } from './asked.ts';
 import { uprightDimension } from './dimension.ts';
+import type { Room } from './freeLabel.ts';
+import { freeLabel } from './freeLabel.ts';
 import type { Frame } from './frame.ts';
 import { colours, letters } from './ink.ts';
-import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
 import { levelMark, levelMarkBox } from './levelMark.ts';
-import type { Placer } from './placer.ts';
+import { IN_THE_WAY, STRUCTURE, type Box, type Placer } from './placer.ts';
 import type { Piece } from './piece.ts';
 import { stratumOf } from './strata.ts';
 import { likeliest, toeLevel, toeSpread } from './substructure.ts';
 import { floodStretches, groundPoints } from './terrain.ts';
 
-/** Where lettering is put, and what is already taken. */
-export interface Room {
-  readonly frame: Frame;
-  readonly placer: Placer;
-  readonly accent: string;
-}
-
 /** How far from the upright of an envelope the flag of its foot may stand, px. */
 const OUTSIDE_PX = [8, 24, 44, 70, 98] as const;
-
-/** A flag that overlaps by more than this stands in the way of something, px2. */
-const IN_THE_WAY = 40;
 
 /** Ground and fill that may stand over the foot of a flag, m. */
 const BURIED_M = 0.3;
@@ -145,34 +137,6 @@ export function depthMarks(site: Site, option: AppraisedOption, room: Room): Pie
     room.placer.take({ left: x, right: x + 34, top, bottom }, 2);
     return [uprightDimension(x, top, bottom, level(depth), { asked: overOf(option, at, 'structureM') })];
   });
-}
-
-/** Lettering with a white edge, put down where it covers least. */
-function freeLabel(
-  room: Room,
-  places: readonly (readonly [x: number, y: number])[],
-  words: string,
-  style: {
-    readonly size?: number;
-    readonly italic?: boolean;
-    readonly fill?: string;
-    readonly letterSpacing?: number;
-    readonly anchor?: 'start' | 'middle' | 'end';
-    readonly figure?: Asked;
-  },
-  limit = 160,
-): Piece | null {
-  const size = style.size ?? letters.drawing;
-  const width = textWidth(words, size) + (style.letterSpacing ?? 0) * words.length;
-  const shift = style.anchor === 'middle' ? width / 2 : style.anchor === 'end' ? width : 0;
-  const boxes = places.map(([x, y]) => ({
-    left: x - shift,
-    right: x - shift + width,
-    top: y - size * 0.78,
-    bottom: y + size * 0.22,
-  }));
-  const chosen = places[room.placer.choose(boxes, limit)];
-  return chosen === undefined ? null : label(chosen[0], chosen[1], words, { ...style, halo: true });
 }
 
 /** Names of waters and ways in italics, as on maps. */
@@ -287,33 +251,32 @@ export function belowGround(
 /** A deck is taken in pieces about as long as this, so that one on a slope takes no more than its own depth, px. */
 const DECK_PIECE_PX = 40;
 
-/** How bad it is to write over a pier or a wall, and how far lettering keeps off it, px. */
-const STRUCTURE = 6;
+/** How far lettering keeps off a pier or a wall, px. */
 const CLEAR_PX = 3;
 
-/** Everything lettering must keep off: structure, ground, supports. */
+/** The box round some points with a margin, px. */
+function around(points: readonly (readonly [x: number, y: number])[], marginPx: number): Box {
+  const [xs, ys] = [points.map(([x]) => x), points.map(([, y]) => y)];
+  return {
+    left: Math.min(...xs) - marginPx,
+    right: Math.max(...xs) + marginPx,
+    top: Math.min(...ys),
+    bottom: Math.max(...ys),
+  };
+}
+
+/** Everything lettering must keep off: structure, ground, supports and their axes. */
 export function takeRoom(site: Site, option: AppraisedOption | null, frame: Frame, room: Placer): void {
   room.takeLine(groundPoints(site, frame), 2, 1.4);
   if (option === null) return;
-  for (const { unit, design, fromM, toM } of placedUnits(option)) {
-    for (const { support, footM } of design.walls ?? []) {
-      const at = unit.supportsM[support]!;
-      room.take(
-        {
-          left: frame.x(at - footM / 2) - CLEAR_PX,
-          right: frame.x(at + footM / 2) + CLEAR_PX,
-          top: frame.y(soffitLevel(site, option, at)),
-          bottom: frame.y(groundLevel(site, at)),
-        },
-        STRUCTURE,
-      );
-    }
+  for (const { design, fromM, toM } of placedUnits(option)) {
     for (const shape of design.elevation) {
       if (shape.faint === true) continue;
       const points = shape.points.map(
         ([x, z]) => [frame.x(fromM + x), frame.y(slabLevel(site, option, fromM + x) + z)] as const,
       );
       room.takeLine(points, 1.5, 1);
+      if (shape.part.endsWith(' wall')) room.take(around(points, CLEAR_PX), STRUCTURE);
     }
     const pieces = Math.max(1, Math.ceil(((toM - fromM) * frame.pxPerM) / DECK_PIECE_PX));
     const place = (i: number): number => fromM + ((toM - fromM) * i) / pieces;
@@ -323,7 +286,7 @@ export function takeRoom(site: Site, option: AppraisedOption | null, frame: Fram
         {
           left: frame.x(left),
           right: frame.x(right),
-          top: frame.y(roadLevel(option, middle) + 1.1),
+          top: frame.y(roadLevel(option, middle) + PARAPET_M),
           bottom: frame.y(soffitLevel(site, option, middle)),
         },
         2,
@@ -331,6 +294,9 @@ export function takeRoom(site: Site, option: AppraisedOption | null, frame: Fram
     }
   }
   for (const support of option.supports) {
+    const x = frame.x(support.chainageM);
+    // Its axis, down from its bubble.
+    room.take({ left: x - CLEAR_PX, right: x + CLEAR_PX, top: 0, bottom: frame.y(support.topLevelM) });
     const foundation = likeliest(support);
     const half = Math.max(support.shaft.lengthM, 1) / 2;
     room.take(

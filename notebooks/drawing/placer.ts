@@ -15,6 +15,12 @@ function overlap(a: Box, b: Box): number {
   );
 }
 
+/** Lettering that covers more than this stands in the way of something, px2. */
+export const IN_THE_WAY = 40;
+
+/** How bad it is to write over a pier or a wall. */
+export const STRUCTURE = 6;
+
 /** Keeps lettering off lines and off other lettering: remembers what is taken and picks the freest of some places. */
 export interface Placer {
   /** Marks a box as taken. `weight` says how bad it is to write over it. */

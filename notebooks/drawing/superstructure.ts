@@ -2,7 +2,7 @@ import type { FormInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Shape, Site } from '../model.ts';
 import { siteOf } from '../model.ts';
 import type { PlacedUnit } from './alongOption.ts';
-import { placedUnits, readAt, roadBends, roadLevel, slabLevel } from './alongOption.ts';
+import { PARAPET_M, placedUnits, readAt, roadBends, roadLevel, slabLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
@@ -195,7 +195,7 @@ export function superstructure(
   let postLines = '';
   if (posts > 0) {
     for (let x = from; x <= to + 1e-6; x += posts)
-      postLines += `M${num(frame.x(x))},${num(frame.y(roadLevel(option, x) + 1.1))}V${num(frame.y(roadLevel(option, x)))}`;
+      postLines += `M${num(frame.x(x))},${num(frame.y(roadLevel(option, x) + PARAPET_M))}V${num(frame.y(roadLevel(option, x)))}`;
   }
   return g(
     { class: 'superstructure' },
@@ -211,7 +211,7 @@ export function superstructure(
     !plain &&
       el('path', {
         'data-part': 'parapet',
-        d: pathOf(along(from - over, to + over, 1.1)) + postLines,
+        d: pathOf(along(from - over, to + over, PARAPET_M)) + postLines,
         fill: 'none',
         stroke: colours.second,
         'stroke-width': pens.fine,

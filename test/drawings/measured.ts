@@ -41,6 +41,9 @@ import {
   type Node,
 } from './measuring/svg.ts';
 
+/** Size of the lettering of a drawing; capitals are 0.7 of it. */
+const LETTERING_PX = 11;
+
 const file = (piece: Piece): Node => readSvg(toSvgFile(piece));
 const wordsOf = (svg: Node): string[] =>
   [...within(svg)].filter(({ tag }) => tag === 'text').map(({ text }) => text);
@@ -214,6 +217,36 @@ describe('flags of a crossing', { timeout: 120_000 }, () => {
             left < shelf.right && right > shelf.left && top < triangle.bottom && bottom > shelf.top,
         );
         expect(struck, `option ${String(option.number)}, ${words}`).toEqual([]);
+      }
+    }
+  });
+});
+
+describe('figures of envelopes', { timeout: 120_000 }, () => {
+  it.each(exampleNames)('keep off the piers and walls of every option of %s', (name) => {
+    const { study, appraisal } = example(name);
+    const { site, options } = appraisal;
+    for (const option of options) {
+      for (const widthPx of [760, 980, 1224]) {
+        const svg = file(crossing({ site, option, obstacles: study.brief.obstacles, widthPx }));
+        const standing = [...within(svg)]
+          .filter(({ attrs }) => /^(?:shaft|abutment|.*wall)$/u.test(attrs['data-part'] ?? ''))
+          .map(boxOf);
+        const [envelopes] = having(svg, 'class', 'clearances');
+        for (const { tag, text, attrs } of envelopes === undefined ? [] : within(envelopes)) {
+          if (tag !== 'text') continue;
+          const wide = textWidth(text, LETTERING_PX);
+          const before = { middle: wide / 2, end: wide }[attrs['text-anchor'] ?? ''] ?? 0;
+          const [left, foot] = [Number(attrs['x']) - before, Number(attrs['y'])];
+          const struck = standing.filter(
+            (one) =>
+              one.left < left + wide &&
+              one.right > left &&
+              one.top < foot &&
+              one.bottom > foot - 0.7 * LETTERING_PX,
+          );
+          expect(struck, `option ${String(option.number)} at ${String(widthPx)} px, ${text}`).toEqual([]);
+        }
       }
     }
   });
