@@ -95,6 +95,9 @@ function brackets(
   });
 }
 
+/** Lettering keeps this far off the line of the budget, px. */
+const LIMIT_PX = 4;
+
 /** P10, P50 and P90 of each option against the budget; what cannot be separated is bracketed together. */
 export function costIntervals(input: CostIntervalsInput): Piece {
   const { options, standing, budget, widthPx } = input;
@@ -126,12 +129,11 @@ export function costIntervals(input: CostIntervalsInput): Piece {
   const withinX = priceX + 78;
   const figure = { size: letters.table } as const;
   const limit = budget === null ? NaN : axis.x(budget);
-  /** Middle of a median's figure: beside the line of the budget where that would run through it, on its own side. */
-  const clearOf = (x: number, text: string): number => {
-    const reach = textWidth(text, letters.table, 600) / 2 + 4;
-    if (!(Math.abs(x - limit) < reach)) return x;
-    return x < limit ? limit - reach : limit + reach;
-  };
+  /** How far lettering between two places moves, to the left or to the right, where the line of the budget would run through it. */
+  const aside = (from: number, to: number, side: 'left' | 'right'): number =>
+    limit > from - LIMIT_PX && limit < to + LIMIT_PX
+      ? limit + (side === 'left' ? -LIMIT_PX - to : LIMIT_PX - from)
+      : 0;
   return sheet(widthPx, bottom + 8, 'Cost of each option, 10, 50 and 90 per cent, against the budget', [
     ink.defs.length > 0 && el('defs', {}, ink.defs),
     gridUprights(axis.ticks.map(axis.x), head - 6, bottom),
@@ -166,6 +168,13 @@ export function costIntervals(input: CostIntervalsInput): Piece {
       const { p10, p50, p90 } = option.cost;
       const within = standing.within[option.number];
       const leads = standing.leader === option.number;
+      const [low, likely, high] = [p10, p50, p90].map((money) => money2(money / unit.per)) as [
+        string,
+        string,
+        string,
+      ];
+      const [lowAt, likelyAt, highAt] = [axis.x(p10) - 5, axis.x(p50), axis.x(p90) + 5];
+      const half = textWidth(likely, letters.table, 600) / 2;
       return g(
         { class: 'option' },
         rowHead(
@@ -175,25 +184,30 @@ export function costIntervals(input: CostIntervalsInput): Piece {
           input.reference,
           narrow ? undefined : optionTitle(option).split(', ').slice(0, 2).join(', '),
         ),
-        label(axis.x(p10) - 5, y + 4, money2(p10 / unit.per), {
+        label(lowAt + aside(lowAt - textWidth(low, letters.drawing), lowAt, 'left'), y + 4, low, {
           anchor: 'end',
           fill: colours.second,
           halo: true,
           figure: ofOption(option, 'cost/p10'),
         }),
-        label(axis.x(p90) + 5, y + 4, money2(p90 / unit.per), {
+        label(highAt + aside(highAt, highAt + textWidth(high, letters.drawing), 'right'), y + 4, high, {
           fill: colours.second,
           halo: true,
           figure: ofOption(option, 'cost/p90'),
         }),
         interval(option, axis.x, y, ink, 9),
-        label(clearOf(axis.x(p50), money2(p50 / unit.per)), y - 10, money2(p50 / unit.per), {
-          ...figure,
-          anchor: 'middle',
-          weight: 600,
-          halo: true,
-          figure: ofOption(option, 'cost/p50'),
-        }),
+        label(
+          likelyAt + aside(likelyAt - half, likelyAt + half, likelyAt < limit ? 'left' : 'right'),
+          y - 10,
+          likely,
+          {
+            ...figure,
+            anchor: 'middle',
+            weight: 600,
+            halo: true,
+            figure: ofOption(option, 'cost/p50'),
+          },
+        ),
         !narrow &&
           label(priceX, y + 4.5, significant(option.pricePerM2.withApproaches, 2), {
             ...figure,

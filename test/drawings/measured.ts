@@ -7,9 +7,11 @@ import {
   type AppraisedOption,
 } from '../../lib/index.ts';
 import { exampleNames, type ExampleName } from '../../notebooks/exampleNames.ts';
+import { costIntervals } from '../../notebooks/charts/costIntervals.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
 import { deckStrips } from '../../notebooks/drawing/deckStrips.ts';
 import { elevation, wantsWidth } from '../../notebooks/drawing/elevation.ts';
+import { pens } from '../../notebooks/drawing/ink.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { elevationText } from '../../notebooks/drawing/elevationText.ts';
 import { optionNote } from '../../notebooks/drawing/optionWords.ts';
@@ -380,6 +382,33 @@ describe('stack(input) beside its costs', { timeout: 120_000 }, () => {
       const unit = having(svg, 'class', 'axis')[0]!.children.find(({ text }) => text === 'M€')!;
       const right = Number(unit.attrs['x']);
       expect(line!.left < right - textWidth('M€', 11) - 2 || line!.left > right + 2).toBe(true);
+    }
+  });
+});
+
+describe('costIntervals(input)', { timeout: 120_000 }, () => {
+  it.each(exampleNames)('writes no cost across the line of the budget of %s', (name) => {
+    const { study, appraisal } = example(name);
+    const { options, standing } = appraisal;
+    const budget = study.brief.budget === 'unknown' ? null : study.brief.budget.amount;
+    for (const widthPx of [380, 760, 980]) {
+      const svg = file(
+        costIntervals({ options, standing, budget, currency: 'EUR', reference: null, widthPx }),
+      );
+      const limit = [...within(svg)].filter(
+        ({ tag, attrs }) => tag === 'path' && attrs['stroke-width'] === String(pens.heavy),
+      );
+      expect(limit).toHaveLength(1);
+      const at = boxOf(limit[0]!).left;
+      const costs = [...within(svg)].filter(({ attrs }) => /\/cost\/p\d0$/u.test(attrs['data-figure'] ?? ''));
+      expect(costs).toHaveLength(3 * options.length);
+      const across = costs.filter(({ text, attrs }) => {
+        const wide = textWidth(text, Number(attrs['font-size'] ?? LETTERING_PX));
+        const before = { middle: wide / 2, end: wide }[attrs['text-anchor'] ?? ''] ?? 0;
+        const left = Number(attrs['x']) - before;
+        return left < at && left + wide > at;
+      });
+      expect(across.map(({ text }) => text)).toEqual([]);
     }
   });
 });
