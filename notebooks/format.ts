@@ -17,6 +17,9 @@ export function fixed(value: number, places: number): string {
   return `${value < 0 && !isZero ? minus : ''}${grouped(text)}`;
 }
 
+/** Share of what a check has that is used, two places; without limit where it has nothing. */
+export const use = (utilisation: number): string => (utilisation === Infinity ? '∞' : fixed(utilisation, 2));
+
 /** Level or depth in metres, two places. */
 export const level = (metres: number): string => fixed(metres, 2);
 

@@ -1,4 +1,4 @@
-import { described, type At, type Descriptor } from '../model/index.ts';
+import { described, formWords, type At, type Descriptor } from '../model/index.ts';
 import { factDictionary, printed, rule, type Fact } from '../rules/index.ts';
 import { factsIn } from '../rules/limitsOn.ts';
 import { wholeCondition } from '../rules/verdictOf.ts';
@@ -50,7 +50,7 @@ export const rulingFigures: readonly Descriptor[] = [
     path: 'droppedCounts/:i/count',
     label: (at) => {
       const { form, reason } = at.appraisal.droppedCounts[at.index('i')]!;
-      return `arrangements of ${form} not kept: ${reason}`;
+      return `arrangements of ${formWords(form)} not kept: ${reason}`;
     },
     unit: 'no',
     method: 'count',

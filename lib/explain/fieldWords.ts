@@ -9,6 +9,8 @@ const units: readonly (readonly [ending: string, unit: string])[] = [
   ['1PerK', '1/K'],
   ['PerK', '1/K'],
   ['MPa', 'MPa'],
+  ['MN', 'MN'],
+  ['Ms', 'm/s'],
   ['KPa', 'kPa'],
   ['Deg', 'deg'],
   ['Cm3', 'cm3'],

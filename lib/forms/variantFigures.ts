@@ -7,18 +7,22 @@ const unit = (steps: string): string => `options/:option/designs/:unit/${steps}`
 const path = 'options/:option/variant/haunchRatio';
 const label = 'depth over the inner supports over that at midspan';
 
-/** Figures of a variant that a unit is asked for as they stand: steps, label and unit. */
+/** Figures of a variant that a unit is asked for as they stand: steps, label (`*` is the span) and unit. */
 const asGiven = [
   ['boxWidthM', 'width asked of the box between the axes of its outer webs', 'm'],
   ['strengthMPa', 'strength asked of the concrete', 'MPa'],
   ['light/densityKgM3', 'oven-dry density of the lightweight concrete', 'kg/m3'],
-  ['light/middleM/:s', 'length of lightweight concrete about the middle of a span', 'm'],
-  ['ballastKNm/:s', 'ballast of a span', 'kN/m'],
+  ['light/middleM/:s', 'length of lightweight concrete about the middle of span *', 'm'],
+  ['ballastKNm/:s', 'ballast of span *', 'kN/m'],
 ] as const;
 
 /** Steps of such a figure at a place, `light/middleM/1`. */
 const filled = (steps: string, at: At): string =>
   steps.includes(':s') ? steps.replace(':s', at.name('s')) : steps;
+
+/** A label with the number of its span. */
+const ofSpan = (words: string, at: At): string =>
+  words.includes('*') ? words.replace('*', String(at.index('s') + 1)) : words;
 
 /** How the main unit of an option is made where its form leaves a choice, and what the haunched unit is sized for. */
 export const variantFigures: readonly Descriptor[] = [
@@ -47,7 +51,7 @@ export const variantFigures: readonly Descriptor[] = [
   ...asGiven.flatMap(([steps, what, unitOf]) => [
     described({
       path: `options/:option/variant/${steps}`,
-      label: what,
+      label: (at) => ofSpan(what, at),
       unit: unitOf,
       method: 'set by hand',
       formula: 'as typed',
@@ -56,7 +60,7 @@ export const variantFigures: readonly Descriptor[] = [
     }),
     described({
       path: unit(`task/${steps}`),
-      label: what,
+      label: (at) => ofSpan(what, at),
       unit: unitOf,
       method: 'as asked',
       formula: 'choice of the option for its main unit',

@@ -26,6 +26,9 @@ export const formIds = [
 ] as const;
 export type FormId = (typeof formIds)[number];
 
+/** A form in running words: 'portal-frame' -> 'portal frame', 'composite-i' -> 'composite I'. */
+export const formWords = (form: FormId): string => form.replaceAll('-', ' ').replace(/ i$/u, ' I');
+
 /** The family each form belongs to. */
 export const familyOf: Readonly<Record<FormId, Family>> = {
   slab: 'slab',

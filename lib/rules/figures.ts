@@ -1,4 +1,11 @@
-import { described, type At, type Descriptor, type FormId, type MethodId } from '../model/index.ts';
+import {
+  described,
+  formWords,
+  type At,
+  type Descriptor,
+  type FormId,
+  type MethodId,
+} from '../model/index.ts';
 import { rulesFor } from './book.ts';
 import type { Subject } from './rule.ts';
 import {
@@ -31,7 +38,7 @@ const window = (
   (['least', 'most'] as const).map((end, i) =>
     described({
       path: `windows/:form/${what}/${end}`,
-      label: (at) => `${end} ${label} of ${form(at)}`,
+      label: (at) => `${end} ${label} of ${formWords(form(at))}`,
       unit,
       kind: 'preset',
       method: 'rules',

@@ -101,7 +101,7 @@ export const studyFigures: readonly Descriptor[] = [
   typed('brief/road/sagRadiusM', 'least radius of a sag', 'm'),
   ...(['start', 'end'] as const).flatMap((end) => [
     typed(`brief/road/${end}TieIn`, `tie-in of the road behind the ${end}`, '', typedOrPreset),
-    typed(`brief/road/${end}ApproachM`, `length of the ${end} approach`, 'm'),
+    typed(`brief/road/${end}ApproachM`, `reach of the road behind the ${end}`, 'm'),
     typed(`brief/road/${end}Gradient`, `gradient of the existing road behind the ${end}`),
   ]),
   typed('brief/road/approachSides', 'sides of the approaches', '', typedOrPreset),
@@ -193,10 +193,17 @@ export const studyFigures: readonly Descriptor[] = [
       ['boxWidthM', 'width of the box', 'm'],
       ['strengthMPa', 'strength of the concrete', 'MPa'],
       ['light/densityKgM3', 'oven-dry density of the lightweight concrete', 'kg/m3'],
-      ['light/middleM/:s', 'length of lightweight concrete about the middle of a span', 'm'],
-      ['ballastKNm/:s', 'ballast of a span', 'kN/m'],
+      ['light/middleM/:s', 'length of lightweight concrete about the middle of span *', 'm'],
+      ['ballastKNm/:s', 'ballast of span *', 'kN/m'],
     ] as const
-  ).map(([steps, label, unit]) => typed(`kept/:i/variant/${steps}`, `${label}, asked for the option`, unit)),
+  ).map(([steps, label, unit]) =>
+    typed(
+      `kept/:i/variant/${steps}`,
+      (at) =>
+        `${steps.endsWith(':s') ? label.replace('*', String(at.index('s') + 1)) : label}, asked for the option`,
+      unit,
+    ),
+  ),
   typed(
     'kept/:i/units/:unit/supportsM/:s',
     (at) => `chainage of support ${at.index('s') + 1}, set by hand`,

@@ -1,4 +1,4 @@
-import { fixed } from '../format.ts';
+import { fixed, use } from '../format.ts';
 import type { Asked } from '../drawing/asked.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
@@ -69,7 +69,7 @@ export function checkBars(input: CheckBarsInput): Piece {
           lines.map((text, at) =>
             label(0, top + 13 + at * 16, text, { size: letters.table, weight, halo: true }),
           ),
-          label(widthPx, top + 13, fixed(check.utilisation, 2), {
+          label(widthPx, top + 13, use(check.utilisation), {
             size: letters.table,
             anchor: 'end',
             weight,
@@ -107,6 +107,6 @@ export const checkTable = (input: CheckBarsInput): Table => ({
     { text: fixed(check.demand, 1), figure: ofCheck(input, check, 'demand') },
     { text: fixed(check.capacity, 1), figure: ofCheck(input, check, 'capacity') },
     check.unit,
-    { text: fixed(check.utilisation, 2), figure: ofCheck(input, check, 'utilisation') },
+    { text: use(check.utilisation), figure: ofCheck(input, check, 'utilisation') },
   ]),
 });

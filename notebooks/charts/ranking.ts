@@ -1,4 +1,14 @@
-import { currencySign, listed, money2, moneyUnit, odds, signed, significant, spansText } from '../format.ts';
+import {
+  currencySign,
+  listed,
+  money2,
+  moneyUnit,
+  odds,
+  signed,
+  significant,
+  spansText,
+  use,
+} from '../format.ts';
 import { spanPaths, spansOf } from '../drawing/alongOption.ts';
 import type { Asked } from '../drawing/asked.ts';
 import { dataFigure, ofOption, perM2Of, rangeOf, withinOf } from '../drawing/asked.ts';
@@ -144,7 +154,7 @@ export function ranking(input: RankingInput): Piece {
             ),
           figure(significant(option.months.p50, 2), ofOption(option, 'months/p50')),
           figure(
-            option.limitingCheck.utilisation.toFixed(2),
+            use(option.limitingCheck.utilisation),
             ofOption(option, 'limitingCheck/utilisation'),
             option.limitingCheck.utilisation > 1.0005 ? 'fails' : '',
           ),

@@ -1,4 +1,4 @@
-import { fixed, level } from '../format.ts';
+import { level, use } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { AsItStands } from './studyCells.ts';
 import { moneyWords } from './words.ts';
@@ -14,7 +14,7 @@ export function asItStandsNote({ option, faults, isFrozen }: AsItStands, currenc
   const { headroom, limitingCheck, number, cost } = option;
   const range = `${moneyWords(cost.p50, currency)} (${moneyWords(cost.p10, currency)} to ${moneyWords(cost.p90, currency)})`;
   const spare = headroom ? `, ${level(headroom.spareM)} m spare over ${headroom.reason}` : '';
-  const check = `${limitingCheck.label} at ${fixed(limitingCheck.utilisation, 2)}`;
+  const check = `${limitingCheck.label} at ${use(limitingCheck.utilisation)}`;
   return [
     h('p', {}, `Option ${number}, the reference: ${range}${spare}, ${check}.`),
     forbidden,

@@ -3,7 +3,7 @@ import { tableBehind } from '../charts/table.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { section } from '../drawing/section.ts';
 import { mainDesign, mainDesignPath, sectionRow } from '../drawing/sectionRow.ts';
-import { fixed } from '../format.ts';
+import { use } from '../format.ts';
 import { h } from '../html.ts';
 import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
@@ -18,7 +18,7 @@ export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
           `Option ${v.reference.number} is governed by ${v.reference.limitingCheck.label}, `,
           workedFigure(
             ofOption(v.reference, 'limitingCheck/utilisation'),
-            fixed(v.reference.limitingCheck.utilisation, 2),
+            use(v.reference.limitingCheck.utilisation),
           ),
           '.',
         ]

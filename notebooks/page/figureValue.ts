@@ -1,5 +1,5 @@
 import type { Figure } from '../../lib/index.ts';
-import { currencySign, fixed, money2, moneyUnit, odds, significant } from '../format.ts';
+import { currencySign, fixed, money2, moneyUnit, odds, significant, use } from '../format.ts';
 
 type Valued = Pick<Figure, 'path' | 'value' | 'unit'>;
 
@@ -20,6 +20,7 @@ function metres(value: number): string {
 }
 
 function number(value: number, unit: string): string {
+  if (value === Infinity) return use(value);
   if (unit === 'm') return metres(value);
   if (unit === '' || unit === 'no') {
     if (Number.isInteger(value)) return fixed(value, 0);
@@ -27,6 +28,9 @@ function number(value: number, unit: string): string {
   if (Math.abs(value) < 1e-9) return '0';
   return significant(value, unit === 'months' ? 2 : 3);
 }
+
+/** Gradients are ratios in the study and per cent in the trade. */
+const GRADIENT = /gradient(?:Change)?$/iu;
 
 /** A figure as it is printed and its unit, which stands outside the underline. */
 export interface PrintedValue {
@@ -48,6 +52,7 @@ export function printedValue({ path, value, unit }: Valued): PrintedValue {
     const scale = size < 1000 ? { per: 1, label: currencySign(unit) } : moneyUnit(unit, size);
     return { text: money2(value / scale.per), unit: scale.label };
   }
+  if (unit === '' && GRADIENT.test(path)) return { text: significant(100 * value, 3), unit: '%' };
   const text = path.includes('/pricePerM2/') ? money2(value) : number(value, unit);
   return { text, unit: unitWords(unit) };
 }

@@ -183,17 +183,25 @@ export const variants = (): Context =>
       widthM,
       ultimateWidthM: widthM,
     });
-    const supportsM = [startM, startM + 0.28 * (endM - startM), startM + 0.72 * (endM - startM), endM];
+    const supportsM = (endShare: number): number[] => {
+      const endSpanM = endShare * (endM - startM);
+      return [startM, startM + endSpanM, endM - endSpanM, endM];
+    };
     const methods = {
       'composite-i': 'crane',
       'concrete-box': 'falsework',
       'cantilever-box': 'balanced-cantilever',
     } as const;
-    const kept = (number: number, form: keyof typeof methods, variant: AskedVariant): KeptOption => ({
+    const kept = (
+      number: number,
+      form: keyof typeof methods,
+      variant: AskedVariant,
+      endShare = 0.28,
+    ): KeptOption => ({
       number,
       form,
       method: methods[form],
-      units: [{ form, role: 'main', supportsM }],
+      units: [{ form, role: 'main', supportsM: supportsM(endShare) }],
       depthM: null,
       variant,
     });
@@ -228,6 +236,8 @@ export const variants = (): Context =>
             light: { densityKgM3: 1900, middleM: [0, 60, 0] },
             ballastKNm: [20, 0, 30],
           }),
+          // Arms longer than the end spans balance, held down by them and what is laid in them.
+          kept(39, 'cantilever-box', { ballastKNm: [60, 0, 60] }, 0.22),
         ],
       },
     };

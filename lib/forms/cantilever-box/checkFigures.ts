@@ -28,7 +28,7 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
   ...check(
     'hold-down',
     ['uplift where the longer arm of a pier comes nearest to lifting a support', 'upliftKN'],
-    ['weight that stands there', 'holdingKN'],
+    ['weight that stands on that support', 'holdingKN'],
     'EN 1990 table A2.4(A) (from memory)',
   ),
   ...check(
@@ -144,7 +144,12 @@ export const cantileverCheckFigures: readonly Descriptor[] = [
   ),
   ...check(
     'ballast-room',
-    ['ballast of a span / its weight per m3', 'ballastKN', 'data/concrete-box/ballast/weightKNm3'],
+    [
+      'ballast of the span that is filled most x its length / weight per m3',
+      'ballast',
+      'spans',
+      'data/concrete-box/ballast/weightKNm3',
+    ],
     ['area of the cells along that span', 'spans', './task/depthM', './depthM/support', 'webSpacingM'],
   ),
   ...anyBoxFigures(manual),

@@ -69,14 +69,16 @@ export const stages: readonly Row[] = [
     'spans',
     'data/cantilever-box/holdDown/overturning',
     'data/cantilever-box/holdDown/traveller',
+    'data/cantilever-box/holdDown/holding',
   ],
   [
     'holdingKN',
-    'weight that stands there',
+    'weight that stands on that support',
     'kN',
     '0.95 (arms on the support + pieces on falsework + ballast + diaphragm)',
     'spans',
     'areaM2',
+    'ballast',
     'data/cantilever-box/holdDown/holding',
   ],
   [

@@ -38,5 +38,5 @@ export const concreteFigures = ({ sized }: ReturnType<typeof formManual>): reado
     'data/materials/lightConcrete/:standard/tensionFixed',
     'data/materials/lightConcrete/:standard/strutShare',
   ),
-  sized('ballastKN', 'ballast in the cells', 'kN', 'load by span x spans', 'spans'),
+  sized('ballastKN', 'ballast in the cells', 'kN', 'sum of load of a span x its length', 'ballast', 'spans'),
 ];

@@ -17,8 +17,17 @@ const frame = [
   'middleHeightM',
   'lastHeightM',
 ] as const;
-const onFeet = ['data/portal-frame/foot/stiffKNm3', 'data/portal-frame/foot/lengthOverHeight'] as const;
-const onSoft = ['data/portal-frame/foot/softKNm3', 'data/portal-frame/foot/lengthOverHeight'] as const;
+const footing = [
+  'data/portal-frame/foot/lengthOverHeight',
+  'data/portal-frame/foot/leastLengthM',
+  './task/deck/widthM',
+] as const;
+const onFeet = ['data/portal-frame/foot/stiffKNm3', ...footing] as const;
+const onSoft = ['data/portal-frame/foot/softKNm3', ...footing] as const;
+const heldAlong =
+  'plane frame; a foot is held along by modulus of the ground x length x width, the length a share of the height of its wall';
+const stiffFeet = `${heldAlong}, and against turning by modulus x width x length^3 / 12`;
+const softFeet = `${heldAlong}, and turns freely`;
 const deckBars = ['soffit along', 'top along', 'across', 'links', 'chairs and details'];
 const walls = ['first wall', 'middle wall', 'last wall'];
 const wallBars = walls.flatMap((wall) => [`${wall} upright`, `${wall} level`]);
@@ -95,34 +104,22 @@ export const portalFigures: readonly Descriptor[] = [
     './task/deck/widthM',
     'data/slab-deck/wings/fromDepthM',
   ),
-  statics('kneeOwnKNm', 'own-weight moment at the knee, stiff feet', 'kNm', 'plane frame', onFeet),
-  statics(
-    'kneeOwnSoftKNm',
-    'own-weight moment at the knee, soft feet',
-    'kNm',
-    'plane frame, feet turn freely',
-    onSoft,
-  ),
-  statics('midspanOwnKNm', 'own-weight moment at midspan, stiff feet', 'kNm', 'plane frame', onFeet),
-  statics(
-    'midspanOwnSoftKNm',
-    'own-weight moment at midspan, soft feet',
-    'kNm',
-    'plane frame, feet turn freely',
-    onSoft,
-  ),
+  statics('kneeOwnKNm', 'own-weight moment at the knee, stiff feet', 'kNm', stiffFeet, onFeet),
+  statics('kneeOwnSoftKNm', 'own-weight moment at the knee, soft feet', 'kNm', softFeet, onSoft),
+  statics('midspanOwnKNm', 'own-weight moment at midspan, stiff feet', 'kNm', stiffFeet, onFeet),
+  statics('midspanOwnSoftKNm', 'own-weight moment at midspan, soft feet', 'kNm', softFeet, onSoft),
   statics(
     'middleOwnKNm',
     'own-weight moment over the middle wall, on the side of the last span, stiff feet',
     'kNm',
-    'plane frame',
+    stiffFeet,
     onFeet,
   ),
   statics(
     'middleOwnSoftKNm',
     'own-weight moment over the middle wall, on the side of the last span, soft feet',
     'kNm',
-    'plane frame, feet turn freely',
+    softFeet,
     onSoft,
   ),
   figure('middleStruckKN', {
@@ -141,7 +138,7 @@ export const portalFigures: readonly Descriptor[] = [
     'greatest moment of that force alone in the middle wall, its foot on the ground and its head held by the deck',
     'kNm',
     'plane frame, the worse of stiff and soft feet',
-    ['middleStruckKN', 'data/portal-frame/foot/stiffKNm3', 'data/portal-frame/foot/softKNm3'],
+    ['middleStruckKN', ...onFeet, 'data/portal-frame/foot/softKNm3'],
   ),
   figure('quakeKN', {
     label: 'force of an earthquake along the road',
@@ -160,16 +157,10 @@ export const portalFigures: readonly Descriptor[] = [
     'greatest moment of that force alone in a wall',
     'kNm',
     'plane frame, deck and walls drawn by their weight, the worse of stiff and soft feet',
-    ['quakeKN', 'data/portal-frame/foot/stiffKNm3', 'data/portal-frame/foot/softKNm3'],
+    ['quakeKN', ...onFeet, 'data/portal-frame/foot/softKNm3'],
   ),
-  statics('thrustOwnKN', 'own-weight thrust outwards, stiff feet', 'kN', 'plane frame', onFeet),
-  statics(
-    'thrustOwnSoftKN',
-    'own-weight thrust outwards, soft feet',
-    'kN',
-    'plane frame, feet turn freely',
-    onSoft,
-  ),
+  statics('thrustOwnKN', 'own-weight thrust outwards, stiff feet', 'kN', stiffFeet, onFeet),
+  statics('thrustOwnSoftKN', 'own-weight thrust outwards, soft feet', 'kN', softFeet, onSoft),
   ...(
     [
       ['kneeDesignKNm', 'design moment of the deck where its top bars are used most'],
