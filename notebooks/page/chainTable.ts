@@ -33,7 +33,18 @@ function rangeWords({ path, unit, range }: Figure): string {
   return low === high ? '' : `10 to 90 %: ${low ?? ''} to ${high ?? ''}`;
 }
 
-const reading = (read: boolean): HTMLElement => (read ? h('b', {}, 'read') : h('i', {}, 'from memory'));
+type Source = Figure['because']['sources'][number];
+
+const isRuleOfThumb = ({ text }: Source): boolean => /common practice, no source/iu.test(text);
+
+/** Whether all of some sources were read; what has no source is no more than that. */
+const reading = (sources: readonly Source[]): HTMLElement =>
+  sources.every(({ read }) => read)
+    ? h('b', {}, 'read')
+    : h('i', {}, sources.every(isRuleOfThumb) ? 'common practice' : 'from memory');
+
+/** A source without its stop, and without what is said of its reading beside it. */
+const named = ({ text }: Source): string => text.replace(/(?: \(from memory\)|, from memory)?\.?$/u, '');
 
 /** Trade notation with its own signs: 'a x b - c^2' -> 'a × b − c²'. */
 const notation = (formula: string): string =>
@@ -47,7 +58,7 @@ function shortly(figure: Figure): HtmlChild {
   const { because } = figure;
   const words = sentence([kindOf(figure), because.method]);
   const [first] = because.sources;
-  return [words, first && '; ', first && reading(because.sources.every(({ read }) => read))];
+  return [words, first && '; ', first && reading(because.sources)];
 }
 
 /** How a figure was found and after what: method and formula, then each source with whether it was read. */
@@ -55,8 +66,8 @@ function fully(figure: Figure): HtmlChild {
   const { method, formula, sources } = figure.because;
   return [
     sentence([kindOf(figure), method, notation(formula), rangeWords(figure)]),
-    sources.map(({ text, read }) =>
-      h('span', { class: 'source' }, text.replace(/\.$/u, ''), '; ', reading(read)),
+    sources.map((source) =>
+      h('span', { class: 'source' }, named(source), !isRuleOfThumb(source) && ['; ', reading([source])]),
     ),
   ];
 }
