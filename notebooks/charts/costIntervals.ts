@@ -23,6 +23,8 @@ export interface CostIntervalsInput extends OptionsInput {
   readonly currency: string;
   /** E.g. '2026 Q1'. */
   readonly priceDate?: string;
+  /** Room on a page, px: rows stand closer where they would need more. */
+  readonly heightPx?: number;
 }
 
 /** Odds inside a group in words: of two options which is cheaper, of more the range either way. */
@@ -95,6 +97,10 @@ function brackets(
   });
 }
 
+/** Room under the last row, and the least from one row to the next, px. */
+const FOOT_PX = 28;
+const LEAST_PITCH_PX = 26;
+
 /** Lettering keeps this far off the line of the budget, px. */
 const LIMIT_PX = 4;
 
@@ -108,8 +114,9 @@ export function costIntervals(input: CostIntervalsInput): Piece {
   );
   const narrow = widthPx < 680;
   const unit = moneyUnit(input.currency, Math.max(0, ...options.map((option) => option.cost.p90)));
-  const pitch = narrow ? 40 : 42;
   const head = 44;
+  const roomy = ((input.heightPx ?? Infinity) - head - FOOT_PX) / options.length;
+  const pitch = Math.max(LEAST_PITCH_PX, Math.min(narrow ? 40 : 42, roomy));
   const left = narrow ? 92 : 320;
   const bracketRoom = narrow ? 84 : 148;
   const columns = narrow ? 0 : 138;

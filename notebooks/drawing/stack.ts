@@ -82,10 +82,10 @@ export function stack(input: StackInput): Piece {
 
 /**
  * The stack in parts no higher than a page, on the same scales, for printing; the width must be that of a full sheet.
- * @param heightPx room on a page; 960 on A3 landscape
+ * @param heightPx room on a page
  * @param firstPx room on the page on which it begins, under what stands there already
  */
-export function stackOnPaper(input: StackInput, heightPx = 960, firstPx = heightPx): Piece[] {
+export function stackOnPaper(input: StackInput, heightPx: number, firstPx = heightPx): Piece[] {
   const { shared, bodyPx } = layOut(input);
   const roomOn = (page: number): number => (page === 0 ? firstPx : heightPx) - stackHead - stackFoot;
   const parts: AppraisedOption[][] = [];

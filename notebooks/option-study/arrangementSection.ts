@@ -10,7 +10,7 @@ import { stack, stackChainage, stackOnPaper } from '../drawing/stack.ts';
 import { stackOutset } from '../drawing/stackSheet.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
-import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
+import { PAPER_PX, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
 import { riverTable } from './riverTable.ts';
 import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
@@ -93,7 +93,7 @@ export function arrangementSection(
         prefix: 'stack',
       };
       if (room.isPaper)
-        return stackOnPaper(input, 960, FIRST_SHEET_PX).map((part) => h('div', { class: 'part' }, part));
+        return stackOnPaper(input, PAPER_PX, FIRST_SHEET_PX).map((part) => h('div', { class: 'part' }, part));
       const { appraisal: of } = v.stacked;
       return [
         inRoom(stack({ ...input, hands: v.hands }), room.widthPx + stackOutset, 'Elevations', 'with-bar'),

@@ -18,6 +18,9 @@ import { studyDesk } from './studyDesk.ts';
 import type { StudyCells } from './studyCells.ts';
 import { crossingWords } from './words.ts';
 
+/** Of what is said beside a cell: how its figures are changed, which paper need not say. */
+const onScreen = { class: 'on-screen' };
+
 const presetNotes = ({ obstacles }: Brief): HtmlChild =>
   obstacles
     .filter(({ clearance }) => clearance?.confirmed === false)
@@ -26,12 +29,10 @@ const presetNotes = ({ obstacles }: Brief): HtmlChild =>
         'p',
         { class: 'caution' },
         h('b', {}, 'Caution.'),
-        ` The headroom over ${name} is a preset; its authority has not confirmed it. Enter on the figure confirms it.`,
+        ` The headroom over ${name} is a preset; its authority has not confirmed it.`,
+        h('span', onScreen, ' Enter on the figure confirms it.'),
       ),
     );
-
-/** Of what is said beside a cell: how its figures are changed, which paper need not say. */
-const onScreen = { class: 'on-screen' };
 
 /** What of the crossing can be taken hold of, and how. */
 const handWords = ({ windows }: Site): string =>

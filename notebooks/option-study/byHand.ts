@@ -7,6 +7,10 @@ import type { StudyStore } from '../page/index.ts';
 import { askedWords } from './choiceEdits.ts';
 import { released, withDepth, withLock, withVariant } from './handEdits.ts';
 
+/** How an option that follows the search is taken in hand; paper need not say it. */
+const TAKE_HOLD =
+  ' Take hold of it in the stack: drag a pier, its soffit or an abutment that the brief leaves a window, or click a span and type; a double click between two piers adds one, a double click on a pier removes it. It then keeps your figures under its number.';
+
 const action = (words: string, key: string, act: () => void, name = words): HTMLElement =>
   h(
     'button',
@@ -39,9 +43,12 @@ export function byHand(
       store.edit((study) => withLock(study, option, index, !isLocked), { what }),
     );
   });
-  const said =
+  const said: HtmlChild =
     kept === undefined
-      ? `${name}, the reference, stands as the search proposed it. Take hold of it in the stack: drag a pier, its soffit or an abutment that the brief leaves a window, or click a span and type; a double click between two piers adds one, a double click on a pier removes it. It then keeps your figures under its number.`
+      ? [
+          `${name}, the reference, stands as the search proposed it.`,
+          h('span', { class: 'on-screen' }, TAKE_HOLD),
+        ]
       : kept.depthM === null
         ? `${name}, the reference, is kept by hand: its supports stay where you put them, its depth is that of least cost.`
         : `${name}, the reference, is kept by hand: its supports stay where you put them, and its depth of ${level(kept.depthM)} m.`;

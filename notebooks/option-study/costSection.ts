@@ -5,7 +5,7 @@ import { costIntervals, costTable } from '../charts/costIntervals.ts';
 import { oddsMatrix, oddsTable } from '../charts/oddsMatrix.ts';
 import { tableBehind } from '../charts/table.ts';
 import { h } from '../html.ts';
-import { pushed, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
+import { PAPER_PX, pushed, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
 import { madeFigure } from './madeFigure.ts';
@@ -106,6 +106,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
         const input = {
           ...common(v, room.widthPx, 'intervals'),
           budget: budgetOf(v.brief),
+          ...(room.isPaper ? { heightPx: PAPER_PX } : {}),
           ...(budget === 'unknown' ? {} : { priceDate: budget.priceDate }),
         };
         return [costIntervals(input), tableBehind(costTable(input))];

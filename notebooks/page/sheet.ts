@@ -72,6 +72,9 @@ export interface Sheet {
 /** Body and wide body of the full sheet, px, as it is printed: 980 px are 259 m at 1:1000. */
 const FULL = { body: 980, wide: 1224 } as const;
 
+/** Height that a drawing may take on a printed sheet, A3 landscape, px. */
+export const PAPER_PX = 960;
+
 const fullRoom = ({ element }: CellHost, isPaper: boolean): Room => ({
   widthPx: element.classList.contains('wide') ? FULL.wide : FULL.body,
   isPaper,

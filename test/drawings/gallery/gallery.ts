@@ -100,7 +100,10 @@ function drawStack(): void {
     h(
       'div',
       { class: 'on-paper' },
-      ...stackOnPaper({ site, options, standing, budget, currency: 'EUR', reference, widthPx: 1224, paper }),
+      ...stackOnPaper(
+        { site, options, standing, budget, currency: 'EUR', reference, widthPx: 1224, paper },
+        960,
+      ),
     ),
   );
   listenToStack(stackHolder.querySelector('svg')!);
