@@ -1,6 +1,6 @@
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
-import { textWidth } from './lettering.ts';
+import { wrapText } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { sheet } from './sheet.ts';
@@ -88,6 +88,9 @@ interface Leavers {
   readonly used: boolean;
 }
 
+/** Words beside the line end this far from it, px. */
+const WORDS_OFF_PX = 8;
+
 /**
  * Spans that leave the screen over one edge, those to what is used and those to what uses it each drawn as one, with
  * words at the edge that say where they go.
@@ -98,11 +101,9 @@ function leavers(kinds: readonly Leavers[], lineX: number, from: number, edgeY: 
   return kinds.flatMap(({ names, used }) => {
     const [first] = names;
     if (first === undefined) return [];
-    const words = [`${used ? 'from' : 'to'} ${first}`];
-    if (names.length > 1) words.push(`${String(names.length - 1)} more`);
-    // A narrow band takes the words on two lines.
-    const whole = words.join(', ');
-    const lines = textWidth(whole, letters.drawing) > lineX - 10 ? words : [whole];
+    const more = names.length > 1 ? `, ${String(names.length - 1)}\u00a0more` : '';
+    // A narrow band takes the words on several lines.
+    const lines = wrapText(`${used ? 'from' : 'to'} ${first}${more}`, lineX - WORDS_OFF_PX, letters.drawing);
     const top = down ? wordsY - 13 * (lines.length - 1) : wordsY;
     wordsY = down ? top - 13 : top + 13 * lines.length;
     const endY = down ? top - 12 : top + 13 * (lines.length - 1) + 4;
@@ -115,7 +116,9 @@ function leavers(kinds: readonly Leavers[], lineX: number, from: number, edgeY: 
         'stroke-width': pens.thin,
         'stroke-dasharray': used ? undefined : '4 3',
       }),
-      ...lines.map((line, i) => label(lineX - 8, top + i * 13, line, { anchor: 'end', halo: true })),
+      ...lines.map((line, i) =>
+        label(lineX - WORDS_OFF_PX, top + i * 13, line, { anchor: 'end', halo: true }),
+      ),
     ];
   });
 }
