@@ -60,7 +60,7 @@ describe('stationLine', () => {
 
   it('stationLine(view) ends spans that leave the screen in one line with words', () => {
     const piece = stationLine({ ...input, joined, view: { top: 300, bottom: 1000 } });
-    expect(texts(piece)).toEqual(['from 1+010', 'to 2+020, 1 more']);
+    expect(texts(piece)).toEqual(['from 1+010', 'to 2+020, 1\u00a0more']);
     expect(curves(piece)).toHaveLength(3);
   });
 
@@ -76,7 +76,7 @@ describe('stationLine', () => {
 
   it('stationLine(lineX) of a narrow band sets those words on two lines', () => {
     const piece = stationLine({ ...input, joined, view: { top: 0, bottom: 1000 }, lineX: 60 });
-    expect(texts(piece)).toEqual(['to 2+020', '1 more']);
+    expect(texts(piece)).toEqual(['to 2+020,', '1\u00a0more']);
   });
 
   it('stationLine keeps every span between the edge of the sheet and its line', () => {
