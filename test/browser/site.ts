@@ -33,8 +33,14 @@ const quiet = [
   '--font-render-hinting=none',
 ];
 
-/** Serves the built site (building it where nobody has yet), or one built elsewhere, and starts the browser. */
-export async function openSite(outDir = resolve(root, 'dist')): Promise<Site> {
+/** Beside other tests on the same processors, threads of the engine's own would only wait for one another. */
+const amongOthers = ['--js-flags=--single-threaded'];
+
+/**
+ * Serves the built site (building it where nobody has yet), or one built elsewhere, and starts the browser.
+ * @param isAlone nothing else runs beside it: the engine works with all its threads
+ */
+export async function openSite(outDir = resolve(root, 'dist'), isAlone = false): Promise<Site> {
   if (!existsSync(resolve(outDir, 'option-study.html'))) {
     await build({ configFile, logLevel: 'silent', build: { outDir } });
   }
@@ -45,7 +51,10 @@ export async function openSite(outDir = resolve(root, 'dist')): Promise<Site> {
     preview: { host: '127.0.0.1', port: 0 },
   });
   const address = server.resolvedUrls!.local[0]!;
-  const browser: Browser = await chromium.launch({ executablePath: await findChromium(), args: quiet });
+  const browser: Browser = await chromium.launch({
+    executablePath: await findChromium(),
+    args: isAlone ? quiet : [...quiet, ...amongOthers],
+  });
   let last: BrowserContext | undefined;
   return {
     address,
