@@ -33,14 +33,8 @@ const quiet = [
   '--font-render-hinting=none',
 ];
 
-/** Beside other tests on the same processors, threads of the engine's own would only wait for one another. */
-const amongOthers = ['--js-flags=--single-threaded'];
-
-/**
- * Serves the built site (building it where nobody has yet), or one built elsewhere, and starts the browser.
- * @param isAlone nothing else runs beside it: the engine works with all its threads
- */
-export async function openSite(outDir = resolve(root, 'dist'), isAlone = false): Promise<Site> {
+/** Serves the built site (building it where nobody has yet), or one built elsewhere, and starts the browser. */
+export async function openSite(outDir = resolve(root, 'dist')): Promise<Site> {
   if (!existsSync(resolve(outDir, 'option-study.html'))) {
     await build({ configFile, logLevel: 'silent', build: { outDir } });
   }
@@ -51,10 +45,7 @@ export async function openSite(outDir = resolve(root, 'dist'), isAlone = false):
     preview: { host: '127.0.0.1', port: 0 },
   });
   const address = server.resolvedUrls!.local[0]!;
-  const browser: Browser = await chromium.launch({
-    executablePath: await findChromium(),
-    args: isAlone ? quiet : [...quiet, ...amongOthers],
-  });
+  const browser: Browser = await chromium.launch({ executablePath: await findChromium(), args: quiet });
   let last: BrowserContext | undefined;
   return {
     address,
