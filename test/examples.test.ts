@@ -3,4 +3,5 @@
  * own: in one file it is worked out once.
  */
 import './appraise/examplesOpen.ts';
+import './drawings/keptClear.ts';
 import './drawings/measured.ts';

@@ -7,11 +7,9 @@ import {
   type AppraisedOption,
 } from '../../lib/index.ts';
 import { exampleNames, type ExampleName } from '../../notebooks/exampleNames.ts';
-import { costIntervals } from '../../notebooks/charts/costIntervals.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
 import { deckStrips } from '../../notebooks/drawing/deckStrips.ts';
 import { elevation, wantsWidth } from '../../notebooks/drawing/elevation.ts';
-import { pens } from '../../notebooks/drawing/ink.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { elevationText } from '../../notebooks/drawing/elevationText.ts';
 import { optionNote } from '../../notebooks/drawing/optionWords.ts';
@@ -42,9 +40,6 @@ import {
   type Box,
   type Node,
 } from './measuring/svg.ts';
-
-/** Size of the lettering of a drawing; capitals are 0.7 of it. */
-const LETTERING_PX = 11;
 
 const file = (piece: Piece): Node => readSvg(toSvgFile(piece));
 const wordsOf = (svg: Node): string[] =>
@@ -224,36 +219,6 @@ describe('flags of a crossing', { timeout: 120_000 }, () => {
   });
 });
 
-describe('figures of envelopes', { timeout: 120_000 }, () => {
-  it.each(exampleNames)('keep off the piers and walls of every option of %s', (name) => {
-    const { study, appraisal } = example(name);
-    const { site, options } = appraisal;
-    for (const option of options) {
-      for (const widthPx of [760, 980, 1224]) {
-        const svg = file(crossing({ site, option, obstacles: study.brief.obstacles, widthPx }));
-        const standing = [...within(svg)]
-          .filter(({ attrs }) => /^(?:shaft|abutment|.*wall)$/u.test(attrs['data-part'] ?? ''))
-          .map(boxOf);
-        const [envelopes] = having(svg, 'class', 'clearances');
-        for (const { tag, text, attrs } of envelopes === undefined ? [] : within(envelopes)) {
-          if (tag !== 'text') continue;
-          const wide = textWidth(text, LETTERING_PX);
-          const before = { middle: wide / 2, end: wide }[attrs['text-anchor'] ?? ''] ?? 0;
-          const [left, foot] = [Number(attrs['x']) - before, Number(attrs['y'])];
-          const struck = standing.filter(
-            (one) =>
-              one.left < left + wide &&
-              one.right > left &&
-              one.top < foot &&
-              one.bottom > foot - 0.7 * LETTERING_PX,
-          );
-          expect(struck, `option ${String(option.number)} at ${String(widthPx)} px, ${text}`).toEqual([]);
-        }
-      }
-    }
-  });
-});
-
 describe('section(input), measured', { timeout: 120_000 }, () => {
   it.each(exampleNames)('gives back deck, carriageway and depth of every unit of %s', (name) => {
     for (const option of example(name).appraisal.options) measureUnits(option, () => true);
@@ -382,33 +347,6 @@ describe('stack(input) beside its costs', { timeout: 120_000 }, () => {
       const unit = having(svg, 'class', 'axis')[0]!.children.find(({ text }) => text === 'M€')!;
       const right = Number(unit.attrs['x']);
       expect(line!.left < right - textWidth('M€', 11) - 2 || line!.left > right + 2).toBe(true);
-    }
-  });
-});
-
-describe('costIntervals(input)', { timeout: 120_000 }, () => {
-  it.each(exampleNames)('writes no cost across the line of the budget of %s', (name) => {
-    const { study, appraisal } = example(name);
-    const { options, standing } = appraisal;
-    const budget = study.brief.budget === 'unknown' ? null : study.brief.budget.amount;
-    for (const widthPx of [380, 760, 980]) {
-      const svg = file(
-        costIntervals({ options, standing, budget, currency: 'EUR', reference: null, widthPx }),
-      );
-      const limit = [...within(svg)].filter(
-        ({ tag, attrs }) => tag === 'path' && attrs['stroke-width'] === String(pens.heavy),
-      );
-      expect(limit).toHaveLength(1);
-      const at = boxOf(limit[0]!).left;
-      const costs = [...within(svg)].filter(({ attrs }) => /\/cost\/p\d0$/u.test(attrs['data-figure'] ?? ''));
-      expect(costs).toHaveLength(3 * options.length);
-      const across = costs.filter(({ text, attrs }) => {
-        const wide = textWidth(text, Number(attrs['font-size'] ?? LETTERING_PX));
-        const before = { middle: wide / 2, end: wide }[attrs['text-anchor'] ?? ''] ?? 0;
-        const left = Number(attrs['x']) - before;
-        return left < at && left + wide > at;
-      });
-      expect(across.map(({ text }) => text)).toEqual([]);
     }
   });
 });
