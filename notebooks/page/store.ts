@@ -159,9 +159,9 @@ export function studyStore(
       const joins = isOpen && coalesce !== undefined && last?.key === coalesce;
       if (!joins) endStep();
       const changed = share(draft, change(draft));
+      if (changed === draft) return;
       // A step that comes back to its start is that start itself, so that ending it can tell.
       const next = joins ? share(last.before, changed) : changed;
-      if (next === draft) return;
       if (joins) done[done.length - 1] = { ...last, after: next };
       else done.push({ before: draft, after: next, key: coalesce, what });
       isOpen = coalesce !== undefined;

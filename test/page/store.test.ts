@@ -103,6 +103,17 @@ describe('studyStore', () => {
     expect(endM()).toBe(1475);
   });
 
+  it('edit(change, {coalesce}) that moves to where it is already changes no slice', () => {
+    const { store, value, endTo } = opened();
+    endTo(1475, 'end');
+    const [draft, brief] = [value(store.draft), value(store.slices.brief)];
+    endTo(1475, 'end');
+    expect(value(store.draft)).toBe(draft);
+    expect(value(store.slices.brief)).toBe(brief);
+    store.undo();
+    expect(value(store.slices.brief).crossing.endM).toBe(1470);
+  });
+
   it('endStep() forgets a drag that came back to where it began', () => {
     const { store, value, endTo } = opened();
     const draft = value(store.draft);
