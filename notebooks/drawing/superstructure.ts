@@ -36,18 +36,9 @@ function shapePiece(
   ink: FormInk,
   frame: Frame,
   plain: boolean,
-): Piece | null {
+): Piece {
   const line = ink.line(placed.unit.form);
   const isCable = shape.material === 'stay' || shape.material === 'strand';
-  if (shape.faint === true) {
-    if (plain) return null;
-    return el('path', {
-      d: pathOf(points, shape.kind === 'polygon'),
-      fill: 'none',
-      stroke: line,
-      'stroke-width': 0.55,
-    });
-  }
   if (shape.kind === 'line') {
     const width = Math.max((shape.thicknessM ?? 0) * frame.pxPerM, isCable ? pens.fine : pens.thin);
     return el('path', {
@@ -116,15 +107,20 @@ function unitPiece(
   /** What is built along the road bends with it; cables are straight whatever the road does. */
   const laid = (shape: Shape, points: readonly XY[], closed: boolean): XY[] =>
     (shape.material === 'stay' || shape.material === 'strand' ? points : bent(points, closed)).map(toSheet);
-  // Members above or beside the deck stand behind it; the deck face comes last but for its faint lines.
-  const order = (shape: Shape): number => (shape.faint === true ? 3 : shape.kind === 'line' ? 1 : 2);
-  const shapes = [...design.elevation].sort((a, b) => order(a) - order(b));
+  const outline = (shape: Shape): XY[] =>
+    laid(shape, onFooting(site, option, placed, shape), shape.kind === 'polygon');
+  const firm = design.elevation.filter(({ faint }) => faint !== true);
+  // Members above or beside the deck stand behind it.
+  const order = (shape: Shape): number => (shape.kind === 'line' ? 1 : 2);
+  const shapes = firm.sort((a, b) => order(a) - order(b));
+  // There are many faint lines, and all have one pen: as one path a drawing that follows a hand changes the quicker.
+  const faint = plain ? [] : design.elevation.filter((shape) => shape.faint === true);
   return g(
     { 'data-form': placed.unit.form },
     shapes.map((shape) =>
       shapePiece(
         shape,
-        laid(shape, onFooting(site, option, placed, shape), shape.kind === 'polygon'),
+        outline(shape),
         (shape.holes ?? []).map((hole) => laid(shape, hole, true)),
         placed,
         ink,
@@ -132,6 +128,13 @@ function unitPiece(
         plain,
       ),
     ),
+    faint.length > 0 &&
+      el('path', {
+        d: faint.map((shape) => pathOf(outline(shape), shape.kind === 'polygon')).join(''),
+        fill: 'none',
+        stroke: ink.line(placed.unit.form),
+        'stroke-width': 0.55,
+      }),
   );
 }
 
