@@ -203,12 +203,35 @@ function arrange(
   return { frame, drawn, dimensionY, figureY, height };
 }
 
-/** A row whose top is at `top`. */
+/** Whole rows as they were last drawn, with the costs of the others and the place they were drawn for. */
+const rowLast = new WeakMap<Arranged, { readonly from: readonly unknown[]; readonly row: StackRow }>();
+
+/** A row whose top is at `top`: that drawn last where neither the option nor its place nor the axis of cost has changed. */
 function wideRow(shared: StackSheet, option: AppraisedOption, top: number, bodyPx: number): StackRow {
+  const { input, sheetPx, axis, unit } = shared;
+  const { budget, currency, standing, widthPx } = input;
+  const hands = input.reference === option.number ? input.hands : undefined;
+  const own = arranged(shared, option, bodyPx, hands);
+  const within = standing.within[option.number];
+  const costs = [unit.per, unit.label, axis.from, axis.to, budget, currency, within];
+  const from = [top, bodyPx, widthPx, sheetPx, ...costs];
+  const last = rowLast.get(own);
+  if (last?.from.every((part, i) => part === from[i]) === true) return last.row;
+  const row = drawRow(shared, option, top, bodyPx, own, hands);
+  rowLast.set(own, { from, row });
+  return row;
+}
+
+function drawRow(
+  shared: StackSheet,
+  option: AppraisedOption,
+  top: number,
+  bodyPx: number,
+  { frame, drawn, dimensionY, figureY, height }: Arranged,
+  hands: InHand | undefined,
+): StackRow {
   const { input } = shared;
   const { site } = input;
-  const hands = input.reference === option.number ? input.hands : undefined;
-  const { frame, drawn, dimensionY, figureY, height } = arranged(shared, option, bodyPx, hands);
   const children = [
     ...drawn,
     figures(shared, option, bodyPx + 22, input.widthPx, figureY),

@@ -171,8 +171,11 @@ export function choiceTable(graph: Graph, store: StudyStore, { reference }: Stud
     );
     sayMade = (worked) => {
       if (worked !== null && worked.number !== first.number) return;
-      for (const [cell, key, field] of made)
-        cell.replaceChildren(...h('span', {}, worked && madeWords(worked, key, field)).childNodes);
+      for (const [cell, key, field] of made) {
+        const next = h('span', {}, worked && madeWords(worked, key, field));
+        // While a pier is dragged most stay what they are.
+        if (!cell.isEqualNode(next)) cell.replaceChildren(...next.childNodes);
+      }
     };
     sayMade(now());
     const head = ['choice', 'asked for', 'worked out'];

@@ -164,8 +164,11 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
     changed: lines.redraw,
   };
 
+  /** Runs of text that follow cells, each as it is brought up to date. */
+  const runs: (() => void)[] = [];
   const onPaper = (isPaper: boolean) => (): void => {
     lines.setPaper(isPaper);
+    if (isPaper) for (const draw of runs) draw();
     for (const host of hosts()) host.setRoom(isPaper ? fullRoom(host, isPaper) : null);
     queue.flush();
   };
@@ -186,19 +189,30 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
       const part = h('span', { class: 'live' });
       let state: State<Values<typeof uses>> = { state: 'pending' };
       let shown: unknown;
-      const late = lateness(() => queue.request(draw));
+      /** Whether it is on the screen or about to be: elsewhere it rests like a drawing. */
+      let isNear = true;
+      const update = (): void => (isNear ? draw() : rests.put(draw, Infinity));
+      const updateSoon = (): void => queue.request(update);
+      const late = lateness(updateSoon);
       const draw = (): void => {
+        rests.drop(draw);
         part.classList.toggle('pending', state.state === 'failed' || late.isLate());
         if (!('value' in state) || state.value === shown) return;
         shown = exchange(part, h('span', {}, show(state.value))) ? state.value : undefined;
       };
-      part.addEventListener('focusout', () => queue.request(draw));
+      part.addEventListener('focusout', updateSoon);
+      runs.push(draw);
       stops.push(
         graph.view(uses, (next) => {
           state = next;
           late.set(next.state === 'pending');
-          queue.request(draw);
+          updateSoon();
         }),
+        sight.watch(part, (next) => {
+          isNear = next;
+          if (isNear) updateSoon();
+        }),
+        () => rests.drop(draw),
         late.end,
       );
       return part;
