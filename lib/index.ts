@@ -38,7 +38,7 @@ export { depthGuidance, type DepthGuidance } from './depthGuidance.ts';
 export { guide, type Guide, type GuideForm, type GuideTask } from './guide.ts';
 export { sentence } from './messages/index.ts';
 export { drawDrivers, drawRates, ratePacks, ratesFor } from './price/index.ts';
-export { depthBand, endRatioWindow, source, spanWindow, type Source } from './rules/index.ts';
+export { depthBand, endRatioWindow, fact, printed, source, spanWindow, type Source } from './rules/index.ts';
 export {
   CROSSFALL,
   abutmentWindows,

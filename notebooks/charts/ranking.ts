@@ -5,6 +5,7 @@ import {
   moneyUnit,
   odds,
   signed,
+  fixed,
   significant,
   spansText,
   use,
@@ -152,7 +153,7 @@ export function ranking(input: RankingInput): Piece {
               within === undefined ? undefined : withinOf(option),
               within !== undefined && within < 0.2 ? 'fails' : '',
             ),
-          figure(significant(option.months.p50, 2), ofOption(option, 'months/p50')),
+          figure(fixed(option.months.p50, 0), ofOption(option, 'months/p50')),
           figure(
             use(option.limitingCheck.utilisation),
             ofOption(option, 'limitingCheck/utilisation'),

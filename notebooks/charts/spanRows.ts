@@ -1,4 +1,4 @@
-import { builtSpans, spanWindow } from '../../lib/index.ts';
+import { builtSpans, fact, printed, spanWindow } from '../../lib/index.ts';
 import type { FormId, Guide, GuideForm } from '../../lib/index.ts';
 import { fixed, plain } from '../format.ts';
 import type { SpanRow } from './spanChart.ts';
@@ -47,7 +47,7 @@ const turns: Readonly<Record<string, (turn: Turn) => string>> = {
 /** How far a form is from standing otherwise: 'possible over 97 m, 34 m longer'. Undefined where nothing turns it. */
 export function flipWords({ flip }: Pick<GuideForm, 'flip'>): string | undefined {
   if (flip === undefined) return undefined;
-  const turn = turns[flip.fact] ?? (({ to, unit }) => `at ${plain(to)} ${unit}`.trimEnd());
+  const turn = turns[flip.fact] ?? (({ fact: id, to }) => `at ${fact(id).label} ${printed(fact(id), to)}`);
   return `${flip.becomes} ${turn(flip)}`;
 }
 

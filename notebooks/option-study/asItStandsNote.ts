@@ -13,10 +13,10 @@ export function asItStandsNote({ option, faults, isFrozen }: AsItStands, currenc
   if (!option) return forbidden;
   const { headroom, limitingCheck, number, cost } = option;
   const range = `${moneyWords(cost.p50, currency)} (${moneyWords(cost.p10, currency)} to ${moneyWords(cost.p90, currency)})`;
-  const spare = headroom ? `, ${level(headroom.spareM)} m spare over ${headroom.reason}` : '';
-  const check = `${limitingCheck.label} at ${use(limitingCheck.utilisation)}`;
+  const spare = headroom ? `; ${level(headroom.spareM)} m spare over ${headroom.reason}` : '';
+  const check = `governed by ${limitingCheck.label}, ${use(limitingCheck.utilisation)}`;
   return [
-    h('p', {}, `Option ${number}, the reference: ${range}${spare}, ${check}.`),
+    h('p', {}, `Option ${number}, the reference: ${range}${spare}; ${check}.`),
     forbidden,
     isFrozen &&
       h('p', {}, 'Its supports and depths are held; arrangements, odds and order are being worked out.'),
