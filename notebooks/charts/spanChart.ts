@@ -45,9 +45,21 @@ export interface SpanChartInput {
   /** Ends of the span axis, m; what the rows need unless given. */
   readonly axisM?: readonly [from: number, to: number];
   readonly widthPx: number;
+  /** Room on a page, px: rows stand closer where they would need more, never closer than their words. */
+  readonly heightPx?: number;
   readonly paper?: Paper;
   readonly prefix?: string;
 }
+
+/** Air in a row over and under its words, px, and the least of it on a full page. */
+const AIR_PX = 9;
+const LEAST_AIR_PX = 3;
+
+/** Room under the rows for what thick, thin and grey mean, px. */
+const FOOT_PX = 26;
+
+/** Line of words in a row, px. */
+const LINE_PX = 16;
 
 const marked = [5, 10, 20, 50, 100, 200, 500, 1000, 2000];
 
@@ -149,14 +161,17 @@ export function spanChart(input: SpanChartInput): Piece {
   const lettering = rows.map((row) =>
     narrow ? linesOf(row, widthPx - nameX, letters.drawing) : linesOf(row, widthPx - wordsX, letters.table),
   );
+  const roomy = (input.heightPx ?? Infinity) - head - FOOT_PX;
+  const words = lettering.reduce((sum, lines) => sum + lineCount(lines) * LINE_PX, 0);
+  const air = Math.max(LEAST_AIR_PX, Math.min(AIR_PX, (roomy - words) / rows.length));
   const heights = lettering.map((lines) =>
-    narrow ? 25 + lineCount(lines) * 13 : Math.max(25, 9 + lineCount(lines) * 16),
+    narrow ? 25 + lineCount(lines) * 13 : Math.max(LINE_PX + air, air + lineCount(lines) * LINE_PX),
   );
   const tops = heights.map((_, index) => head + heights.slice(0, index).reduce((sum, one) => sum + one, 0));
   const middleOf = (index: number): number =>
     (tops[index] ?? head) + (narrow ? 13 : (heights[index] ?? 25) / 2);
   const bottom = head + heights.reduce((sum, one) => sum + one, 0);
-  const foot = bottom + 20;
+  const foot = bottom + FOOT_PX - 6;
   const hasStatistics = rows.some((row) => row.statistics !== undefined);
 
   return sheet(

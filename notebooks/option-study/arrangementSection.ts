@@ -10,7 +10,7 @@ import { stack, stackChainage, stackOnPaper } from '../drawing/stack.ts';
 import { stackOutset } from '../drawing/stackSheet.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
-import { PAPER_PX, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
+import { type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
 import { riverTable } from './riverTable.ts';
 import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
@@ -92,8 +92,10 @@ export function arrangementSection(
         widthPx: room.widthPx,
         prefix: 'stack',
       };
-      if (room.isPaper)
-        return stackOnPaper(input, PAPER_PX, FIRST_SHEET_PX).map((part) => h('div', { class: 'part' }, part));
+      if (room.paperPx !== null) {
+        const parts = stackOnPaper(input, room.paperPx, room.paperPx - OVER_STACK_PX);
+        return parts.map((part) => h('div', { class: 'part' }, part));
+      }
       const { appraisal: of } = v.stacked;
       return [
         inRoom(stack({ ...input, hands: v.hands }), room.widthPx + stackOutset, 'Elevations', 'with-bar'),
@@ -193,8 +195,8 @@ export function arrangementSection(
   ]);
 }
 
-/** Room for the stack on the printed sheet that begins the section, under its heading and first two cells, px. */
-const FIRST_SHEET_PX = 720;
+/** On the printed sheet that begins the section its heading and first two cells stand over the stack, px. */
+const OVER_STACK_PX = 240;
 
 /** Ground shown on either side of the main opening, m. */
 const BESIDE_OPENING_M = 25;

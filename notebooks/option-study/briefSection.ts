@@ -55,7 +55,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
           obstacles: v.brief.obstacles,
           ...sheetIn(v.site, room.widthPx),
           prefix: 'crossing',
-          ...(!room.isPaper && { handles: v.hands }),
+          ...(room.paperPx === null && { handles: v.hands }),
         }),
         room.widthPx,
         'Crossing',
@@ -65,7 +65,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
       const has = crossingHas(scale, widthPx);
       return [
         asItStandsNote(v.asItStands, v.books.currency),
-        has.handles && !room.isPaper && h('p', {}, handWords(v.site)),
+        has.handles && room.paperPx === null && h('p', {}, handWords(v.site)),
         has.band &&
           h(
             'p',

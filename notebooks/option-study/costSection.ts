@@ -4,8 +4,9 @@ import { costByPart, partTable } from '../charts/costByPart.ts';
 import { costIntervals, costTable } from '../charts/costIntervals.ts';
 import { oddsMatrix, oddsTable } from '../charts/oddsMatrix.ts';
 import { tableBehind } from '../charts/table.ts';
+import { fixed } from '../format.ts';
 import { h } from '../html.ts';
-import { PAPER_PX, pushed, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
+import { pushed, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
 import { madeFigure } from './madeFigure.ts';
@@ -40,7 +41,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
     const level = groups.filter((group) => group.length > 1).length;
     return level === 0
       ? 'Every option is separated from the next.'
-      : `${groups.length} groups; inside a group cost does not decide.`;
+      : `${groups.length === 1 ? 'One group' : `${String(groups.length)} groups`}; inside a group cost does not decide.`;
   });
   const shows = { appraisal, reference, brief, books };
   const common = (
@@ -106,7 +107,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
         const input = {
           ...common(v, room.widthPx, 'intervals'),
           budget: budgetOf(v.brief),
-          ...(room.isPaper ? { heightPx: PAPER_PX } : {}),
+          ...(room.paperPx !== null && { heightPx: room.paperPx }),
           ...(budget === 'unknown' ? {} : { priceDate: budget.priceDate }),
         };
         return [costIntervals(input), tableBehind(costTable(input))];
@@ -116,7 +117,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
         h(
           'p',
           {},
-          `Allowance: risk simulation, ${v.books.draws} draws with seed ${v.books.seed}, the same for all options. No contingency on top.`,
+          `Allowance: risk simulation, ${fixed(v.books.draws, 0)} draws with seed ${v.books.seed}, the same for all options. No contingency on top.`,
         ),
         h('p', {}, 'Substructure is a class 5 estimate while there is no borehole, the deck class 4.'),
       ],

@@ -17,6 +17,7 @@ import {
   keeping,
   openFile,
   pagesFrom,
+  printUpright,
   readOnly,
   saveFile,
   savedWords,
@@ -157,6 +158,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
         button('Open', () => void openStudy()),
         button('Save as file', () => saveFile(fileName(whole()), writeStudy(whole()))),
         button('Print', () => print()),
+        button('Print upright', printUpright),
       ],
     },
     head: {
@@ -177,6 +179,11 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
           page.live({ appraisal: cells.appraisal }, (v) => v.appraisal.study.fingerprint.slice(0, 12)),
         ],
       ],
+    },
+    foot: () => {
+      const appraised = graph.state(cells.appraisal);
+      const fingerprint = 'value' in appraised ? appraised.value.study.fingerprint.slice(0, 12) : '';
+      return [store.valid().reference, fingerprint, `prices ${pricesWords(store.valid())}, demo rates`];
     },
     sections: [
       briefSection(page, graph, store, cells),

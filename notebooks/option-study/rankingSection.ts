@@ -1,8 +1,8 @@
-import type { AppraisedOption, Ruling } from '../../lib/index.ts';
+import { fact, printed, type AppraisedOption, type Ruling } from '../../lib/index.ts';
 import { ranking } from '../charts/ranking.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
-import { fixed } from '../format.ts';
+import { listed } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
 import { h, type HtmlChild } from '../html.ts';
 import { pushed, workedFigure, type LineSection, type Sheet } from '../page/index.ts';
@@ -13,9 +13,10 @@ const effects: readonly Ruling['effect'][] = ['out', 'caution', 'to confirm', 'i
 
 const flipWords = (option: AppraisedOption, { flip, rule }: Ruling): HtmlChild => {
   if (!flip) return '';
+  const turning = fact(flip.fact);
   const end = (which: 'from' | 'to'): HTMLElement =>
-    workedFigure(ofOption(option, `rulings/${rule}/flip/${which}`), fixed(flip[which], 2));
-  return [` Turns when ${flip.fact} goes from `, end('from'), ' to ', end('to'), ` ${flip.unit}.`];
+    workedFigure(ofOption(option, `rulings/${rule}/flip/${which}`), printed(turning, flip[which]));
+  return [` Turns at ${turning.label} `, end('to'), '; now ', end('from'), '.'];
 };
 
 /** What the rules say of one option, worst first. */
@@ -56,6 +57,42 @@ function rulingsOf(option: AppraisedOption): HTMLElement {
   );
 }
 
+/** What puts options out or asks for caution, for paper: each reason once, with the options it is said of, those that put out first. */
+function warningsTable(options: readonly AppraisedOption[]): HTMLElement {
+  const said = new Map<string, { readonly ruling: Ruling; readonly numbers: number[] }>();
+  for (const effect of ['out', 'caution'] as const) {
+    for (const option of options) {
+      for (const ruling of option.rulings) {
+        if (ruling.effect !== effect) continue;
+        const words = `${ruling.because.join('; ')}.`;
+        const numbers = said.get(words)?.numbers ?? [];
+        said.set(words, { ruling, numbers: [...numbers, option.number] });
+      }
+    }
+  }
+  const head = ['', 'options', 'because', 'source'].map((word) => h('th', { scope: 'col' }, word));
+  return h(
+    'table',
+    { class: 'warnings' },
+    h('caption', {}, 'What puts options out, and what asks for caution'),
+    h('thead', {}, h('tr', {}, head)),
+    h(
+      'tbody',
+      {},
+      Array.from(said, ([words, { ruling, numbers }]) =>
+        h(
+          'tr',
+          {},
+          h('th', { scope: 'row', class: 'limit' }, ruling.effect),
+          h('td', {}, listed(numbers.map(String))),
+          h('td', { class: 'text' }, words),
+          h('td', { class: 'text source' }, ruling.source),
+        ),
+      ),
+    ),
+  );
+}
+
 /** Section 10: order under the budget, and the rulings behind it. */
 export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
   const { appraisal, reference, brief } = cells;
@@ -89,14 +126,16 @@ export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
       station: '10+020',
       title: 'Rulings',
       shows: { appraisal },
-      body: (v) => v.appraisal.options.map(rulingsOf),
-      notes: [
+      long: true,
+      body: (v, room) =>
+        room.paperPx === null ? v.appraisal.options.map(rulingsOf) : warningsTable(v.appraisal.options),
+      notes: (_, room) =>
+        room.paperPx === null &&
         h(
           'p',
           {},
           'Every ruling names its rule, the numbers, the source, and how far the nearest number is from turning it.',
         ),
-      ],
     }),
     page.cell({
       station: '10+030',

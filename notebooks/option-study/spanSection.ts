@@ -16,6 +16,9 @@ const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartI
   prefix: 'spans',
 });
 
+/** The heading over the chart on its printed sheet, and the notes under it, px. */
+const ROUND_CHART_PX = 110;
+
 /** Section 2: every form against the span that the barred stretch asks for. */
 export function spanSection(page: Sheet, cells: StudyCells): LineSection {
   const { spanning, site } = cells;
@@ -39,7 +42,10 @@ export function spanSection(page: Sheet, cells: StudyCells): LineSection {
             'No stretch of this crossing bars supports, so no span is asked for.',
           );
         }
-        const input = chartInput(v.spanning, v.site.mainOpening.widthM, room.widthPx);
+        const input = {
+          ...chartInput(v.spanning, v.site.mainOpening.widthM, room.widthPx),
+          ...(room.paperPx !== null && { heightPx: room.paperPx - ROUND_CHART_PX }),
+        };
         return [spanChart(input), tableBehind(spanTable(input))];
       },
       notes: [

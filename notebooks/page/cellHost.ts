@@ -13,8 +13,8 @@ import type { StationState } from '../drawing/stationLine.ts';
 /** The room a body has on the sheet. */
 export interface Room {
   readonly widthPx: number;
-  /** True on paper: a drawing higher than a page is given in parts. */
-  readonly isPaper: boolean;
+  /** Height that a drawing may take on a printed sheet, px: one higher than that is given in parts; null on the screen. */
+  readonly paperPx: number | null;
 }
 
 /** A part that stands as it is, or one drawn anew from the values of the cells whenever they have changed. */
@@ -175,9 +175,9 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     const values = 'value' in state ? state.value : undefined;
     if (values === undefined || widthPx === 0) return;
     if (typeof spec.wide === 'function') element.classList.toggle('wide', spec.wide(values));
-    const room = { widthPx, isPaper: given?.isPaper === true };
+    const room = { widthPx, paperPx: given?.paperPx ?? null };
     const isSame =
-      drawn?.values === values && drawn.room.widthPx === widthPx && drawn.room.isPaper === room.isPaper;
+      drawn?.values === values && drawn.room.widthPx === widthPx && drawn.room.paperPx === room.paperPx;
     if (!isOwed && isSame) return;
     drawn = { values, room };
     drawnAt = new Date();

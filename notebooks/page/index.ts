@@ -1,12 +1,5 @@
-export {
-  PAPER_PX,
-  sheet,
-  type BarSpec,
-  type HeadSpec,
-  type PageSpec,
-  type Sheet,
-  type SheetOptions,
-} from './sheet.ts';
+export { sheet, type BarSpec, type HeadSpec, type PageSpec, type Sheet, type SheetOptions } from './sheet.ts';
+export { printUpright } from './paper.ts';
 export { pagesFrom, type PageName } from './pages.ts';
 export type { CellHost, CellSpec, Explained, Part, Room } from './cellHost.ts';
 export type { LineSection } from './stationLines.ts';

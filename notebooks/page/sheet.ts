@@ -9,6 +9,7 @@ import { heights, type Heights } from './heights.ts';
 import { lateness } from './lateness.ts';
 import { isDragging } from './dragging.ts';
 import { drawingActions } from './drawingFile.ts';
+import { isUpright, runningFoot } from './paper.ts';
 import { rests as newRests } from './rests.ts';
 import { sight as newSight } from './sight.ts';
 import { saveTables } from './tableFile.ts';
@@ -41,6 +42,8 @@ export interface PageSpec {
   readonly sections: readonly LineSection[];
   /** Beside the key line; absent leaves the usual hint, false says nothing. */
   readonly hint?: HtmlChild;
+  /** What stands at the foot of every printed sheet after the title, e.g. the reference of a study and its fingerprint. */
+  readonly foot?: () => readonly string[];
 }
 
 export interface SheetOptions {
@@ -69,15 +72,21 @@ export interface Sheet {
   readonly end: () => void;
 }
 
-/** Body and wide body of the full sheet, px, as it is printed: 980 px are 259 m at 1:1000. */
-const FULL = { body: 980, wide: 1224 } as const;
+/** Room on a sheet of one kind: its body, a wide body, and the height a drawing may take on it, px; 980 px are 259 m at 1:1000. */
+interface Full {
+  readonly body: number;
+  readonly wide: number;
+  readonly paperPx: number | null;
+}
+const FULL: Full = { body: 980, wide: 1224, paperPx: null };
+/** A3 laid across. */
+const ACROSS: Full = { ...FULL, paperPx: 960 };
+/** A3 upright has no note margin, and its station band is as narrow as on a hand-held screen. */
+const UPRIGHT: Full = { body: 980, wide: 980, paperPx: 1400 };
 
-/** Height that a drawing may take on a printed sheet, A3 landscape, px. */
-export const PAPER_PX = 960;
-
-const fullRoom = ({ element }: CellHost, isPaper: boolean): Room => ({
-  widthPx: element.classList.contains('wide') ? FULL.wide : FULL.body,
-  isPaper,
+const roomOn = ({ element }: CellHost, { body, wide, paperPx }: Full): Room => ({
+  widthPx: element.classList.contains('wide') ? wide : body,
+  paperPx,
 });
 
 /** Whether everything has been drawn is asked again after so long, ms. */
@@ -166,17 +175,23 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
 
   /** Runs of text that follow cells, each as it is brought up to date. */
   const runs: (() => void)[] = [];
-  const onPaper = (isPaper: boolean) => (): void => {
-    lines.setPaper(isPaper);
-    if (isPaper) for (const draw of runs) draw();
-    for (const host of hosts()) host.setRoom(isPaper ? fullRoom(host, isPaper) : null);
+  const onPaper = (): void => {
+    const full = isUpright() ? UPRIGHT : ACROSS;
+    lines.setPaper(true);
+    for (const draw of runs) draw();
+    for (const host of hosts()) host.setRoom(roomOn(host, full));
+    queue.flush();
+  };
+  const onScreen = (): void => {
+    lines.setPaper(false);
+    for (const host of hosts()) host.setRoom(null);
     queue.flush();
   };
   /** Takes something from a cell as it is drawn on the full sheet, however narrow the screen. */
   const onFullSheet =
     (host: CellHost) =>
     <T>(take: () => T): T => {
-      host.setRoom(fullRoom(host, false));
+      host.setRoom(roomOn(host, FULL));
       queue.flush();
       const taken = take();
       host.setRoom(null);
@@ -283,13 +298,13 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
         () => rests.drop(skip),
       );
       skip();
-      const before = onPaper(true);
-      const after = onPaper(false);
-      window.addEventListener('beforeprint', before);
-      window.addEventListener('afterprint', after);
-      stops.push(lines.end, () => {
-        window.removeEventListener('beforeprint', before);
-        window.removeEventListener('afterprint', after);
+      const { foot = () => [] } = spec;
+      const stopFoot = runningFoot(() => [heading(), ...foot()]);
+      window.addEventListener('beforeprint', onPaper);
+      window.addEventListener('afterprint', onScreen);
+      stops.push(lines.end, stopFoot, () => {
+        window.removeEventListener('beforeprint', onPaper);
+        window.removeEventListener('afterprint', onScreen);
       });
       return element;
     },
