@@ -61,9 +61,25 @@ export const methodIds = [
 ] as const;
 export type MethodId = (typeof methodIds)[number];
 
+/** Methods of construction in words. */
+export const methodNames: Readonly<Record<MethodId, string>> = {
+  crane: 'lifting by crane',
+  falsework: 'casting on falsework',
+  launch: 'launching',
+  'float-in': 'floating in',
+  'balanced-cantilever': 'balanced cantilevering',
+  'stay-cantilever': 'cantilevering on stays',
+};
+
 /** Traffic load standards. Each is a data file in `data/standards`. */
 export const standardIds = ['lm1', 'hl93'] as const;
 export type StandardId = (typeof standardIds)[number];
+
+/** Traffic load standards in words. */
+export const standardNames: Readonly<Record<StandardId, string>> = {
+  lm1: 'EN 1991-2, LM1',
+  hl93: 'AASHTO HL-93',
+};
 
 /** Ground classes; each has its own foundation. */
 export const groundClassIds = ['rock', 'gravel', 'stiff-clay', 'soft-clay'] as const;

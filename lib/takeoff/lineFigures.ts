@@ -1,6 +1,7 @@
-import { described, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
+import { described, methodIds, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
 import { girderLines } from './girderLines.ts';
 import { itemOf } from './items.ts';
+import { setUpWords } from './methodLines.ts';
 
 /** Where a line of an option was measured first: a unit, a support, or the crossing itself. */
 type Origin = { readonly path: string } | { readonly crossing: string };
@@ -271,9 +272,10 @@ export const lineFigures: readonly Descriptor[] = [
     unit,
     method: 'figure of practice',
     formula: 'set-ups of the method, in set-ups of a crane job',
-    inputs: (at) => ({
-      setups: `data/programme/methods/${lineOf(at).what.replace('set-up for ', '')}/setups`,
-    }),
+    inputs(at) {
+      const method = methodIds.find((one) => setUpWords(one) === lineOf(at).what);
+      return { setups: `data/programme/methods/${method!}/setups` };
+    },
     compute: ({ setups }) => setups,
   }),
   described({

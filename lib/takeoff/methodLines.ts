@@ -1,5 +1,8 @@
-import type { Design, MeasuredLine } from '../model/index.ts';
+import { methodNames, type Design, type MeasuredLine, type MethodId } from '../model/index.ts';
 import { methodData } from './methodData.ts';
+
+/** What the set-up of a method is called in the bill. */
+export const setUpWords = (method: MethodId): string => `set-up for ${methodNames[method]}`;
 
 /**
  * Fixed set-up of each method of construction used on the crossing, once however many units use it. A form that measures
@@ -14,7 +17,7 @@ export function methodLines(designs: readonly Design[]): MeasuredLine[] {
     part: 'temporary-works',
     item: 'method-setup',
     quantity: methodData.methods[method].setups,
-    what: `set-up for ${method}`,
+    what: setUpWords(method),
     how: `${methodData.methods[method].setups} times the set-up of a crane job`,
   }));
 }

@@ -2,6 +2,7 @@ import {
   choiceProblems,
   readStudy,
   sentence,
+  standardNames,
   writeStudy,
   type Problem,
   type Study,
@@ -168,10 +169,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
       block: [
         ['Study', page.live({ head }, (v) => v.head.reference)],
         ['Prices', page.live({ brief, books }, (v) => `${pricesWords(v)}, demo rates`)],
-        [
-          'Loading',
-          page.live({ brief }, (v) => (v.brief.loading === 'lm1' ? 'EN 1991-2, LM1' : 'AASHTO HL-93')),
-        ],
+        ['Loading', page.live({ brief }, (v) => standardNames[v.brief.loading])],
         ['Levels', 'm above local datum'],
         ['Stage', 'option study; not for construction'],
         [

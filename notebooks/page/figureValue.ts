@@ -1,5 +1,6 @@
 import type { Figure } from '../../lib/index.ts';
 import { currencySign, fixed, money2, moneyUnit, odds, significant, use } from '../format.ts';
+import { heldWords } from './heldWords.ts';
 
 type Valued = Pick<Figure, 'path' | 'value' | 'unit'>;
 
@@ -45,7 +46,7 @@ export interface PrintedValue {
 export function printedValue({ path, value, unit }: Valued): PrintedValue {
   if (value === null || value === 'unknown') return { text: 'unknown', unit: '' };
   if (typeof value === 'boolean') return { text: value ? 'yes' : 'no', unit: '' };
-  if (typeof value === 'string') return { text: value, unit: '' };
+  if (typeof value === 'string') return { text: heldWords(path, value), unit: '' };
   if (/^standing\/(?:odds|within)\//u.test(path)) return { text: odds(value), unit: '%' };
   if (/^[A-Z]{3}$/u.test(unit)) {
     const size = Math.abs(value);

@@ -1,5 +1,6 @@
 import {
   builtShares,
+  methodNames,
   type BuiltBucket,
   type DepthGuidance,
   type FormId,
@@ -48,7 +49,8 @@ const oneOver = (ratio: number): string => `1/${plain(Number((1 / ratio).toFixed
 /** A band of depth as a ratio in words: '1/25 to 1/20 of the span', with what else is to be said of it. */
 export function ratioWords({ ratio, of, method, leastM }: DepthGuidance): string {
   const least = leastM === undefined ? '' : `; at least ${fixed(leastM, 2)} m for access`;
-  const only = method === undefined ? '' : method === 'launch' ? ', launched' : `, ${method}`;
+  const only =
+    method === undefined ? '' : method === 'launch' ? ', launched' : `, for ${methodNames[method]}`;
   return `${oneOver(ratio[0])} to ${oneOver(ratio[1])} of the ${of}${only}${least}`;
 }
 

@@ -36,8 +36,8 @@ it('measure(crossing) surfaces the deck, edges it twice and sets each method up 
   expect(sum(lines, 'surfacing')).toBeCloseTo(200 * 12, 9);
   expect(sum(lines, 'parapet')).toBeCloseTo(400, 9);
   expect(lines.filter((line) => line.item === 'method-setup').map((line) => line.what)).toEqual([
-    'set-up for crane',
-    'set-up for launch',
+    'set-up for lifting by crane',
+    'set-up for launching',
   ]);
 });
 

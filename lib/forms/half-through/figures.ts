@@ -110,7 +110,7 @@ export const halfThroughFigures: readonly Descriptor[] = [
     'flangeWidthM',
     'width of both flanges',
     'm',
-    'root of widthOverThickness x the largest area asked for, within the room beside the deck',
+    'root of width over thickness x the largest area asked for, within the room beside the deck',
     'sagDesignKNm',
     'hogDesignKNm',
     'edgeGirderM',

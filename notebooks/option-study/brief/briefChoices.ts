@@ -1,5 +1,12 @@
-import type { Access, Demands, Obstacle, Road, StandardId } from '../../../lib/index.ts';
-import type { Choice } from '../../page/index.ts';
+import {
+  standardNames,
+  type Access,
+  type Demands,
+  type Obstacle,
+  type Road,
+  type StandardId,
+} from '../../../lib/index.ts';
+import { supportsWords, type Choice } from '../../page/index.ts';
 
 /** Words of the choices in the brief. */
 export const obstacleKindChoices: readonly Choice<Obstacle['kind']>[] = [
@@ -12,9 +19,9 @@ export const obstacleKindChoices: readonly Choice<Obstacle['kind']>[] = [
 ];
 
 export const supportChoices: readonly Choice<Obstacle['supports']>[] = [
-  { value: 'hard', words: 'barred' },
-  { value: 'soft', words: 'at a price' },
-  { value: 'none', words: 'free' },
+  { value: 'hard', words: supportsWords.hard },
+  { value: 'soft', words: supportsWords.soft },
+  { value: 'none', words: supportsWords.none },
 ];
 
 export const fixedEndChoices: readonly Choice<Road['fixedEnd']>[] = [
@@ -35,8 +42,8 @@ export const approachSideChoices: readonly Choice<Road['approachSides']>[] = [
 ];
 
 export const loadingChoices: readonly Choice<StandardId>[] = [
-  { value: 'lm1', words: 'EN 1991-2, LM1' },
-  { value: 'hl93', words: 'AASHTO HL-93' },
+  { value: 'lm1', words: standardNames.lm1 },
+  { value: 'hl93', words: standardNames.hl93 },
 ];
 
 export const gasMainChoices: readonly Choice<Demands['gasMain']>[] = [
