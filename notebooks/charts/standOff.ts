@@ -22,91 +22,92 @@ export interface PanelRoom {
   readonly bottom: number;
 }
 
-/** Flags stand this far apart in a column, and columns of them as well, px. */
-const APART_PX = 24;
-/** From the outermost mark of a cluster to its first column of flags, px. */
-const FIRST_PX = 32;
+/** Least distance from the middle of a number, px: to another, to a mark or the foot of a flag, to the limit, to an edge of the panel, to the line of a flag that passes. */
+const APART = { number: 22, mark: 14, limit: 13, edge: 12, line: 12.5 } as const;
 
-/** Heights, px, for flags in the order of their places: the slots that are least far from them altogether; null without enough. */
-function inSlots(wanted: readonly number[], slots: readonly number[]): { ys: number[]; cost: number } | null {
-  if (slots.length < wanted.length) return null;
-  // least[k][j]: cost of the first k flags in the first j slots.
-  const least: number[][] = [new Array<number>(slots.length + 1).fill(0)];
-  for (const [k, y] of wanted.entries()) {
-    const row = [Infinity];
-    slots.forEach((slot, j) => row.push(Math.min(row[j]!, least[k]![j]! + Math.abs(slot - y))));
-    least.push(row);
-  }
-  const ys: number[] = [];
-  let j = slots.length;
-  for (let k = wanted.length; k > 0; k -= 1) {
-    while (least[k]![j - 1]! <= least[k]![j]!) j -= 1;
-    ys.unshift(slots[j - 1]!);
-    j -= 1;
-  }
-  return { ys, cost: least.at(-1)!.at(-1)! };
+/** A line that passes a mark keeps this far from it, px. */
+const LINE_TO_MARK_PX = 5;
+
+/** What stands wrong, in px of flag that may be spent to put it right. */
+const WRONG = { hidden: 4000, through: 500, crossing: 500, grazing: 60 } as const;
+
+/** Lengths of flags that are tried, px, each in so many directions. */
+const REACHES_PX = [22, 26, 32, 39, 47, 57, 69, 83, 100, 120, 144, 173];
+const DIRECTIONS = 24;
+
+/** The reference leaves its place only where others cannot. */
+const REFERENCE_WEIGHT = 4;
+
+/** Each pass leaves less that is wrong than the one before; few find anything after the fourth. */
+const MOST_PASSES = 10;
+
+/** What gains less is left as it is, px: sums of the same lengths in another order are no gain. */
+const LEAST_GAIN_PX = 1e-6;
+
+interface Point {
+  readonly x: number;
+  readonly y: number;
 }
 
-/** Flags of one cluster, from top to bottom, in as few columns at one side of it as hold them. */
-function flagsOf(
-  rest: readonly Place[],
-  taken: readonly { readonly x: number; readonly y: number; readonly reach: number }[],
-  limitY: number | null,
-  panel: PanelRoom,
-): Stand[] {
-  const most = Math.max(...rest.map((one) => one.x));
-  const least = Math.min(...rest.map((one) => one.x));
-  const isFree = (x: number, y: number): boolean =>
-    (limitY === null || Math.abs(y - limitY) >= 13) &&
-    taken.every((one) => Math.hypot(one.x - x, one.y - y) >= one.reach);
-  let best: Stand[] = rest.map(({ x, y }) => ({ x, y, flag: true }));
-  let bestCost = Infinity;
-  for (const side of [1, -1] as const) {
-    const edge = side === 1 ? most : least;
-    const columns: { readonly x: number; readonly slots: number[] }[] = [];
-    for (
-      let x = edge + side * FIRST_PX;
-      x <= panel.right - 12 && x >= panel.left + 12;
-      x += side * APART_PX
-    ) {
-      // Slots in steps of a quarter, of which those are kept that leave a whole step to the one before.
-      const slots: number[] = [];
-      for (let y = panel.top + 12; y <= panel.bottom - 12; y += 4)
-        if (isFree(x, y) && y - (slots.at(-1) ?? -Infinity) >= APART_PX) slots.push(y);
-      columns.push({ x, slots });
-      const room = columns.reduce((sum, column) => sum + column.slots.length, 0);
-      if (room < rest.length) continue;
-      // The places are shared out in order: each column takes those of its share of the room.
-      const stands: Stand[] = [];
-      let cost = (columns.length - 1) * 60;
-      let from = 0;
-      for (const [c, column] of columns.entries()) {
-        const left = columns.slice(c + 1).reduce((sum, one) => sum + one.slots.length, 0);
-        const even = Math.ceil((rest.length - from) / (columns.length - c));
-        const count = Math.min(column.slots.length, Math.max(even, rest.length - from - left));
-        const chunk = rest.slice(from, from + count);
-        const laid = inSlots(
-          chunk.map(({ y }) => y),
-          column.slots,
-        );
-        if (laid === null) break;
-        cost += laid.cost;
-        laid.ys.forEach((y) => stands.push({ x: column.x, y, flag: true }));
-        from += count;
-      }
-      if (stands.length === rest.length && cost < bestCost) {
-        bestCost = cost;
-        best = stands;
-      }
-      break;
-    }
-  }
-  return best;
+/** A number with the mark it belongs to. */
+interface Flag {
+  readonly mark: Point;
+  readonly at: Point;
+}
+
+/** A root of squares: `Math.hypot`, which also guards against overflow, is many times slower and asked thousands of times here. */
+const apart = (a: Point, b: Point): number => Math.sqrt((a.x - b.x) ** 2 + (a.y - b.y) ** 2);
+
+/** Distance of a point from a flag's line, px; a number on its own mark has none. */
+function fromLine({ mark, at }: Flag, point: Point): number {
+  const dx = at.x - mark.x;
+  const dy = at.y - mark.y;
+  const square = dx * dx + dy * dy;
+  if (square === 0) return Infinity;
+  const along = ((point.x - mark.x) * dx + (point.y - mark.y) * dy) / square;
+  const t = Math.max(0, Math.min(1, along));
+  return Math.sqrt((mark.x + t * dx - point.x) ** 2 + (mark.y + t * dy - point.y) ** 2);
+}
+
+/** Which side of a flag's line a point is on, by its sign. */
+const sideOf = ({ mark, at }: Flag, point: Point): number =>
+  (at.x - mark.x) * (point.y - mark.y) - (at.y - mark.y) * (point.x - mark.x);
+
+const cross = (a: Flag, b: Flag): boolean =>
+  sideOf(a, b.mark) * sideOf(a, b.at) < 0 && sideOf(b, a.mark) * sideOf(b, a.at) < 0;
+
+/** What two flags do to each other that they should not, whatever marks stand between. */
+const wrongBetween = (a: Flag, b: Flag): number =>
+  (apart(a.at, b.at) < APART.number ? WRONG.hidden : 0) +
+  (cross(a, b) ? WRONG.crossing : 0) +
+  (fromLine(a, b.at) < APART.line ? WRONG.through : 0) +
+  (fromLine(b, a.at) < APART.line ? WRONG.through : 0);
+
+/** Places for the number of a mark: the mark itself, then round about it, inside the panel. */
+function standsAbout({ x, y }: Point, { left, right, top, bottom }: PanelRoom): Point[] {
+  const round = REACHES_PX.flatMap((reach) =>
+    Array.from({ length: DIRECTIONS }, (_, step) => {
+      const angle = ((step + 0.5) / DIRECTIONS) * 2 * Math.PI;
+      return { x: x + reach * Math.cos(angle), y: y + reach * Math.sin(angle) };
+    }),
+  );
+  return [
+    { x, y },
+    ...round.filter(
+      (at) =>
+        at.x >= left + APART.edge &&
+        at.x <= right - APART.edge &&
+        at.y >= top + APART.edge &&
+        at.y <= bottom - APART.edge,
+    ),
+  ];
 }
 
 /**
- * Where each number stands: on its own place, or, where marks are closer than 26 px, on a flag beside them, 24 px apart,
- * in the same order from top to bottom in as few columns as hold them, clear of other numbers and never on the limit.
+ * Where each number stands: on its own mark, or on a flag beside it where marks are too close. Numbers keep clear of each
+ * other, of other marks and of the limit as long as the panel has the room; flags are short, cross as little as can be
+ * and pass no other number. Found by moving one number after another to where it does best, then exchanging pairs, until
+ * neither helps: a local optimum, the same for the same marks.
  */
 export function standOff(
   places: readonly Place[],
@@ -114,44 +115,70 @@ export function standOff(
   limitY: number | null,
   panel: PanelRoom,
 ): Map<number, Stand> {
-  const out = new Map<number, Stand>();
-  const clusters: Place[][] = [];
-  const left = new Set(places);
-  for (const place of places) {
-    if (!left.delete(place)) continue;
-    const cluster = [place];
-    for (let grown = true; grown;) {
-      grown = false;
-      for (const other of left) {
-        if (!cluster.some((one) => Math.hypot(one.x - other.x, one.y - other.y) < 26)) continue;
-        cluster.push(other);
-        left.delete(other);
-        grown = true;
-      }
+  const flags: Flag[] = places.map(({ x, y }) => ({ mark: { x, y }, at: { x, y } }));
+  /** What it costs to have a number there were it the only one: length of flag, marks and limit in its way. */
+  const alone = (index: number, at: Point): number => {
+    const { x, y, option } = places[index]!;
+    const flag = { mark: { x, y }, at };
+    const reach = apart(flag.mark, at);
+    let cost = reach * (option.number === reference ? REFERENCE_WEIGHT : 1);
+    if (limitY !== null && reach > 0 && Math.abs(at.y - limitY) < APART.limit) cost += WRONG.hidden;
+    places.forEach((mark, other) => {
+      if (other === index) return;
+      if (apart(at, mark) < APART.mark) cost += WRONG.hidden;
+      if (fromLine(flag, mark) < LINE_TO_MARK_PX) cost += WRONG.grazing;
+    });
+    return cost;
+  };
+  const choices = places.map((place, index) =>
+    standsAbout(place, panel)
+      .map((at) => ({ at, cost: alone(index, at) }))
+      .sort((a, b) => a.cost - b.cost),
+  );
+  /** What others add, as they stand; not asked further once it is as much as `most`. */
+  const among = (index: number, at: Point, most = Infinity): number => {
+    const flag = { mark: flags[index]!.mark, at };
+    let cost = 0;
+    for (let other = 0; other < flags.length && cost < most; other += 1)
+      if (other !== index) cost += wrongBetween(flag, flags[other]!);
+    return cost;
+  };
+  const costOf = (index: number, at: Point): number => alone(index, at) + among(index, at);
+  const move = (index: number): boolean => {
+    const { mark, at } = flags[index]!;
+    let best = at;
+    let least = costOf(index, at) - LEAST_GAIN_PX;
+    for (const choice of choices[index]!) {
+      // Those that follow cost as much on their own.
+      if (choice.cost >= least) break;
+      const cost = choice.cost + among(index, choice.at, least - choice.cost);
+      if (cost < least) [best, least] = [choice.at, cost];
     }
-    clusters.push(cluster);
+    flags[index] = { mark, at: best };
+    return best !== at;
+  };
+  const exchange = (i: number, j: number): boolean => {
+    const [a, b] = [flags[i]!, flags[j]!];
+    if (apart(a.at, a.mark) === 0 || apart(b.at, b.mark) === 0) return false;
+    const before = costOf(i, a.at) + costOf(j, b.at) - wrongBetween(a, b);
+    flags[i] = { mark: a.mark, at: b.at };
+    flags[j] = { mark: b.mark, at: a.at };
+    const after = costOf(i, b.at) + costOf(j, a.at) - wrongBetween(flags[i], flags[j]);
+    if (after < before - LEAST_GAIN_PX) return true;
+    flags[i] = a;
+    flags[j] = b;
+    return false;
+  };
+  for (let pass = 0, changed = true; changed && pass < MOST_PASSES; pass += 1) {
+    changed = false;
+    for (let i = 0; i < flags.length; i += 1) changed = move(i) || changed;
+    for (let i = 0; i < flags.length; i += 1)
+      for (let j = i + 1; j < flags.length; j += 1) changed = exchange(i, j) || changed;
   }
-  const flagged: Place[][] = [];
-  for (const cluster of clusters) {
-    // The reference keeps its place where 14 px about it are free; a mark alone keeps its own.
-    const stays =
-      cluster.length === 1
-        ? cluster
-        : cluster.filter(
-            (one) =>
-              one.option.number === reference &&
-              cluster.every((other) => other === one || Math.hypot(one.x - other.x, one.y - other.y) >= 14),
-          );
-    for (const one of stays) out.set(one.option.number, { x: one.x, y: one.y, flag: false });
-    const rest = cluster.filter((one) => !stays.includes(one)).sort((a, b) => a.y - b.y);
-    if (rest.length > 0) flagged.push(rest);
-  }
-  for (const rest of flagged) {
-    const numbers = [...out.values()].map(({ x, y }) => ({ x, y, reach: 22 }));
-    // A number may hide no other mark.
-    const dots = places.map(({ x, y }) => ({ x, y, reach: 14 }));
-    const stands = flagsOf(rest, [...numbers, ...dots], limitY, panel);
-    rest.forEach((one, index) => out.set(one.option.number, stands[index]!));
-  }
-  return out;
+  return new Map(
+    places.map(({ option }, index) => {
+      const { mark, at } = flags[index]!;
+      return [option.number, { ...at, flag: at.x !== mark.x || at.y !== mark.y }];
+    }),
+  );
 }

@@ -33,10 +33,12 @@ export interface TradeOffsInput extends OptionsInput {
   readonly measures: readonly Measure[];
   readonly budget: number | null;
   readonly currency: string;
+  /** Height of a panel, px; 330 unless given. */
+  readonly panelPx?: number;
 }
 
-/** Height of a panel, px. */
-export const panelHeight = 330;
+/** Height of a panel on the screen, px. */
+export const PANEL_PX = 330;
 
 /** An option's number on its place or on a flag, where a dot keeps the place. */
 function mark(
@@ -57,11 +59,11 @@ function mark(
     }),
   );
   if (!at.flag) return number;
-  const edge = at.x > place.x ? at.x - 9.5 : at.x + 9.5;
   return g(
     {},
     el('path', {
-      d: `M${num(place.x)},${num(place.y)}L${num(edge + (at.x > place.x ? -7 : 7))},${num(at.y)}H${num(edge)}`,
+      // As far as the middle of the number, which covers the rest.
+      d: `M${num(place.x)},${num(place.y)}L${num(at.x)},${num(at.y)}`,
       fill: 'none',
       stroke: colours.second,
       'stroke-width': pens.fine,
@@ -127,7 +129,8 @@ export function panel(
   const known = input.options.filter((option) => measure.values[option.number] !== undefined);
   const spread = (option: AppraisedOption): Spread =>
     measure.values[option.number] ?? { p10: NaN, p50: NaN, p90: NaN };
-  const bottom = top + panelHeight;
+  const { panelPx = PANEL_PX } = input;
+  const bottom = top + panelPx;
   const axis = linearAxis(
     known.flatMap((option) => Object.values(spread(option)) as number[]),
     left + 10,
@@ -168,8 +171,8 @@ export function panel(
   const path = (run: readonly (readonly [number, number])[]): string =>
     run.length === 0 ? '' : `M${run.map(([a, b]) => `${num(a)},${num(b)}`).join('L')}`;
   let strokes = '';
-  for (let at = left - panelHeight; at < right; at += 8)
-    strokes += `M${num(at)},${num(bottom)}l${num(panelHeight)},${num(-panelHeight)}`;
+  for (let at = left - panelPx; at < right; at += 8)
+    strokes += `M${num(at)},${num(bottom)}l${num(panelPx)},${num(-panelPx)}`;
   const clip = `${input.prefix ?? 'trade'}-${String(Math.round(left))}-${String(Math.round(top))}`;
   return g(
     { class: 'panel' },

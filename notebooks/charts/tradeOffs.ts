@@ -10,13 +10,13 @@ import { formInk } from '../forms/formInk.ts';
 import { logTicks } from './logTicks.ts';
 import type { Table, TableCell } from './table.ts';
 import type { TradeOffsInput } from './tradeOffPanel.ts';
-import { panel, panelHeight } from './tradeOffPanel.ts';
+import { PANEL_PX, panel } from './tradeOffPanel.ts';
 
 export type { Measure, TradeOffsInput } from './tradeOffPanel.ts';
 
 /** Panels of one measure each against cost on one log axis; what nothing beats is filled, the edge is the heavy step. */
 export function tradeOffs(input: TradeOffsInput): Piece {
-  const { options, measures, widthPx, budget } = input;
+  const { options, measures, widthPx, budget, panelPx = PANEL_PX } = input;
   const ink = formInk(
     input.paper ?? 'colour',
     options.map((option) => option.form),
@@ -30,7 +30,7 @@ export function tradeOffs(input: TradeOffsInput): Piece {
   const values = options.flatMap((option) => [option.cost.p10, option.cost.p90]).concat(budget ?? []);
   const low = Math.min(...values) * 0.97;
   const high = Math.max(...values) * 1.03;
-  const blockHeight = panelHeight + (measures.some((measure) => measure.onEdge !== undefined) ? 132 : 78);
+  const blockHeight = panelPx + (measures.some((measure) => measure.onEdge !== undefined) ? 132 : 78);
   const lines = Math.ceil(measures.length / perLine);
   return sheet(
     widthPx,
@@ -40,7 +40,7 @@ export function tradeOffs(input: TradeOffsInput): Piece {
       ink.defs.length > 0 && el('defs', {}, ink.defs),
       Array.from({ length: lines }, (_, lineIndex) => {
         const top = lineIndex * blockHeight + 38;
-        const scale = scaleLog([low, high], [top + panelHeight, top]);
+        const scale = scaleLog([low, high], [top + panelPx, top]);
         const y = (money: number): number => scale(money);
         const ticks = logTicks(low, high, y);
         const inLine = measures.slice(lineIndex * perLine, (lineIndex + 1) * perLine);

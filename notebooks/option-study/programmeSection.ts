@@ -84,6 +84,9 @@ export function programmeSection(page: Sheet, cells: StudyCells): LineSection {
   ]);
 }
 
+/** Height of a panel of the trade-offs on a printed sheet, which has the room to tell close marks apart, px. */
+const PAPER_PANEL_PX = 620;
+
 /** Section 9: what else the money buys. */
 export function tradeOffSection(page: Sheet, cells: StudyCells): LineSection {
   const { appraisal, reference, brief } = cells;
@@ -116,6 +119,7 @@ export function tradeOffSection(page: Sheet, cells: StudyCells): LineSection {
             ],
             widthPx: room.widthPx,
             prefix: 'trade',
+            ...(room.paperPx !== null && { panelPx: PAPER_PANEL_PX }),
           };
           return [tradeOffs(input), tableBehind(tradeOffTable(input))];
         },

@@ -31,8 +31,13 @@ import { tint } from '../../notebooks/forms/formInk.ts';
 import { contrast } from '../../notebooks/forms/optionNumber.ts';
 import { formIds } from '../../lib/model/index.ts';
 
+interface Spot {
+  readonly x: number;
+  readonly y: number;
+}
+
 describe('standOff(places, reference, limitY, panel)', () => {
-  it('keeps the numbers of two dozen marks in one spot apart, in the panel, off the limit and in their order', () => {
+  it('keeps the numbers of two dozen marks in one spot apart, in the panel, off the limit and off other marks, and their flags do not cross', () => {
     const panel = { left: 0, right: 360, top: 40, bottom: 362 };
     const places = Array.from({ length: 24 }, (_, i) => ({
       option: { ...options[0]!, number: i + 1 },
@@ -48,15 +53,21 @@ describe('standOff(places, reference, limitY, panel)', () => {
       expect(y).toBeLessThanOrEqual(panel.bottom - 12);
       expect(Math.abs(y - 200)).toBeGreaterThanOrEqual(13);
       for (const [other, at] of stands)
-        if (other !== number) expect(Math.hypot(at.x - x, at.y - y)).toBeGreaterThanOrEqual(22);
+        if (other !== number) {
+          expect(Math.hypot(at.x - x, at.y - y)).toBeGreaterThanOrEqual(22);
+          const mark = places[other - 1]!;
+          expect(Math.hypot(mark.x - x, mark.y - y)).toBeGreaterThanOrEqual(14);
+        }
     }
-    for (const column of new Set(stands.map(([, { x }]) => x))) {
-      const down = stands
-        .filter(([, { x }]) => x === column)
-        .toSorted(([, a], [, b]) => a.y - b.y)
-        .map(([number]) => number);
-      expect(down).toEqual(down.toSorted((a, b) => a - b));
-    }
+    // Flags do not cross: of two that did, the ends of each would lie on either side of the other.
+    const side = (p: Spot, q: Spot, r: Spot): number => (q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x);
+    const ends = stands.map(([number, at]) => [places[number - 1]!, at] as const);
+    const crossings = ends.flatMap(([a, b], i) =>
+      ends
+        .slice(i + 1)
+        .filter(([c, d]) => side(a, b, c) * side(a, b, d) < 0 && side(c, d, a) * side(c, d, b) < 0),
+    );
+    expect(crossings).toEqual([]);
   });
 });
 
