@@ -99,7 +99,13 @@ export function shelved(path: string): Shelved | undefined {
   let holder = files[steps[0]!];
   let source: string | null = null;
   let unit = '';
+  const words: { readonly words: string; readonly unit: string }[] = [];
   for (const name of steps.slice(1)) {
+    words.push(
+      Array.isArray(holder) && /^\d$/u.test(name)
+        ? { words: `no. ${String(Number(name) + 1)}`, unit: '' }
+        : fieldWords(name),
+    );
     holder = step(holder, name);
     for (const key of ['source', 'reason'] as const) {
       const words = fieldOf(holder, key);
@@ -110,7 +116,6 @@ export function shelved(path: string): Shelved | undefined {
   }
   const value = fieldOf(holder, 'value') ?? holder;
   if (typeof value !== 'number' && typeof value !== 'string' && typeof value !== 'boolean') return undefined;
-  const words = steps.slice(1).map((name) => fieldWords(name));
   return {
     value,
     label: words.map((one) => one.words).join(', '),

@@ -1,1 +1,2 @@
+export { inText } from './inText.ts';
 export { placeOf, remedyFor, sentence, sentences } from './messages.ts';

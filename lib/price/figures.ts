@@ -6,6 +6,7 @@ import {
   type MeasuredLine,
   type Spread,
 } from '../model/index.ts';
+import { inText } from '../messages/index.ts';
 import { itemOf } from '../takeoff/index.ts';
 import { normalCdf } from './normal.ts';
 import { ratesFor, z90, type Rates } from './rates.ts';
@@ -23,8 +24,6 @@ function ratesOf(at: At): Rates {
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 
 const money = (at: At): string => at.study.books.currency;
-/** Words of an item as they stand inside a line of text. */
-const inText = (label: string): string => label.charAt(0).toLowerCase() + label.slice(1);
 const itemWords = (at: At): string => inText(itemOf(at.name('item')).label);
 const perUnit = (at: At): string => `${money(at)}/${itemOf(at.name('item')).unit}`;
 const typedRate = (at: At) => at.study.books.rates.find(({ item }) => item === at.name('item'));

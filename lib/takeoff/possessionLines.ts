@@ -1,4 +1,4 @@
-import type { Design, MeasuredLine, Site, Support } from '../model/index.ts';
+import { methodNames, type Design, type MeasuredLine, type Site, type Support } from '../model/index.ts';
 import { girderLines } from './girderLines.ts';
 import { methodData } from './methodData.ts';
 
@@ -33,7 +33,7 @@ export function possessionLines(
         item: 'rail-possession',
         quantity: Math.ceil(base + perPiece * pieces),
         what: `possessions of ${rail.name}`,
-        how: `${base} for the method ${design.task.method}, ${pieces} pieces over the track`,
+        how: `${base} for ${methodNames[design.task.method]}, ${pieces} pieces over the track`,
       },
     ];
   });

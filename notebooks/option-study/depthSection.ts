@@ -9,6 +9,9 @@ import type { AppraisedOption } from '../model.ts';
 import { depthPrice, roadWords } from './roadWords.ts';
 import type { StudyCells } from './studyCells.ts';
 
+/** Width of the curve of cost where the sheet has the room, px. */
+const CURVE_PX = 660;
+
 /** Section 4: what stands between the deciding obstacle and the road. */
 export function depthSection(page: Sheet, cells: StudyCells): LineSection {
   const { site, brief, books, reference, byDepth } = cells;
@@ -70,7 +73,7 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
       station: '4+020',
       title: 'Cost against depth',
       shows: { reference, byDepth, books },
-      body: (v) => {
+      body: (v, room) => {
         const own = v.reference;
         const worked = v.byDepth.filter(({ number }) => number === own?.number);
         if (!own || worked.length < 3) {
@@ -82,7 +85,7 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
           depthM: own.depthM.midspan,
           limits: depthLimits(worked),
           currency: v.books.currency,
-          widthPx: 660,
+          widthPx: Math.min(CURVE_PX, room.widthPx),
           prefix: 'cost-depth',
         };
         return [depthCurve(input), tableBehind(depthTable(input))];

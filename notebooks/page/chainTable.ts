@@ -46,12 +46,14 @@ const reading = (sources: readonly Source[]): HTMLElement =>
 /** A source without its stop, and without what is said of its reading beside it. */
 const named = ({ text }: Source): string => text.replace(/(?: \(from memory\)|, from memory)?\.?$/u, '');
 
-/** Trade notation with its own signs: 'a x b - c^2' -> 'a × b − c²'. */
+const POWERS = { 2: '²', 3: '³', 4: '⁴' } as const;
+
+/** Trade notation with its own signs: 'a x b - c^2, 0.35 m2' -> 'a × b − c², 0.35 m²'. */
 const notation = (formula: string): string =>
   formula
     .replaceAll(' x ', ' × ')
     .replaceAll(' - ', ' − ')
-    .replace(/\^([23])(?!\d)/gu, (_, power: string) => (power === '2' ? '²' : '³'));
+    .replace(/(?:\^|(?<=\b[cm]?m))([234])(?!\d)/gu, (_, power: '2' | '3' | '4') => POWERS[power]);
 
 /** How a figure was found, in a word or two, and whether its source was read. */
 function shortly(figure: Figure): HtmlChild {
