@@ -74,6 +74,8 @@ export function depthCurve(input: DepthCurveInput): Piece {
     top + 4,
     5,
   );
+  // Steps of 0.05 m need a second place.
+  const places = axis.ticks.every((tick) => Math.abs(10 * tick - Math.round(10 * tick)) < 1e-6) ? 1 : 2;
   const axisName = 'depth at midspan, m';
   const nameFrom = widthPx - textWidth(axisName, letters.drawing);
   const path = lineOf<{ depthM: number; cost: number }>(
@@ -134,7 +136,7 @@ export function depthCurve(input: DepthCurveInput): Piece {
     axis.ticks.map(
       (tick) =>
         (narrow || axis.x(tick) + 14 < nameFrom) &&
-        label(axis.x(tick), bottom + 17, tick.toFixed(1), { anchor: 'middle', fill: colours.second }),
+        label(axis.x(tick), bottom + 17, tick.toFixed(places), { anchor: 'middle', fill: colours.second }),
     ),
     label(widthPx, bottom + (narrow ? 31 : 17), axisName, {
       anchor: 'end',

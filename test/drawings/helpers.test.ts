@@ -2,7 +2,7 @@ import { options, site } from './fixture.ts';
 import { standOff } from '../../notebooks/charts/standOff.ts';
 import { describe, expect, it } from 'vitest';
 import { dominatedSide, edgeOf, undominated } from '../../notebooks/charts/edge.ts';
-import { flatStretch } from '../../notebooks/charts/depthCurve.ts';
+import { depthCurve, flatStretch } from '../../notebooks/charts/depthCurve.ts';
 import { groupOdds } from '../../notebooks/charts/costIntervals.ts';
 import { logTicks } from '../../notebooks/charts/logTicks.ts';
 import { readAt } from '../../notebooks/drawing/alongOption.ts';
@@ -270,4 +270,23 @@ describe('figures behind charts', () => {
     for (let i = 1; i < ticks.length; i += 1)
       expect(300 * Math.log10(ticks[i]! / ticks[i - 1]!)).toBeGreaterThanOrEqual(15);
   });
+});
+
+it('depthCurve({points}) of a narrow band of depth names no two ticks alike', () => {
+  const points = [1, 1.1, 1.2, 1.3].map((depthM) => ({ depthM, cost: 2e6 + 1e5 * depthM }));
+  const drawn = depthCurve({
+    form: 'precast-trough',
+    points,
+    depthM: 1.1,
+    limits: [],
+    currency: 'EUR',
+    widthPx: 660,
+  });
+  const ticks = Array.from(
+    toText(drawn).matchAll(/text-anchor="middle"[^>]*>(\d\.\d+)</gu),
+    ([, text]) => text,
+  );
+  expect(ticks.length).toBeGreaterThan(3);
+  // The depth now is named once more at its mark.
+  expect(ticks.length - new Set(ticks).size).toBeLessThanOrEqual(1);
 });
