@@ -107,12 +107,16 @@ export const leastScale = (onFullSheet: Scale): Scale => (onFullSheet > 5000 ? o
 
 /**
  * Scale of a whole crossing in a room of some width, px, and the width its sheet then takes: wider than the room where
- * the scale would drop too low in it, to be pushed sideways.
+ * the scale would drop too low in it, to be pushed sideways. On paper nothing is pushed: there it drops as low as it takes.
  */
-export function sheetIn(site: Site, roomPx: number): { readonly scale: Scale; readonly widthPx: number } {
+export function sheetIn(
+  site: Site,
+  roomPx: number,
+  canPush = true,
+): { readonly scale: Scale; readonly widthPx: number } {
   const scale = scaleOnSheet(site, roomPx);
   const least = leastScale(scaleOnSheet(site, fullSheetPx));
-  if (scale <= least) return { scale, widthPx: roomPx };
+  if (!canPush || scale <= least) return { scale, widthPx: roomPx };
   return { scale: least, widthPx: wholeWidth(site, least) };
 }
 

@@ -17,9 +17,9 @@ const costStart = 100;
 
 /**
  * Scale of the elevations of a stack, the stretch they show and their width: what stands under them takes the same. On a
- * sheet too narrow for a long crossing they are wider than it, and pushed sideways.
+ * sheet too narrow for a long crossing they are wider than it, and pushed sideways; on paper nothing is pushed.
  */
-export function stackChainage(site: Site, widthPx: number, asked?: Scale) {
+export function stackChainage(site: Site, widthPx: number, asked?: Scale, canPush = true) {
   const narrow = widthPx < narrowBelow;
   const costPx = narrow ? 0 : Math.min(244, Math.max(200, widthPx * 0.2));
   const bodyPx = widthPx - costPx;
@@ -27,7 +27,7 @@ export function stackChainage(site: Site, widthPx: number, asked?: Scale) {
   // Long crossings take the whole width, under their costs, where that gains a scale.
   const whole = asked ?? crossingScale(site, widthPx, 16);
   const least = asked ?? leastScale(crossingScale(site, fullSheetPx, 16));
-  const isPushed = Math.min(beside, whole) > least;
+  const isPushed = canPush && Math.min(beside, whole) > least;
   const isTall = !narrow && (isPushed || (beside >= 5000 && whole < beside));
   const scale = isPushed ? least : isTall ? whole : beside;
   const drawnPx = isPushed ? wholeWidth(site, least) : isTall ? widthPx : bodyPx;
@@ -35,7 +35,10 @@ export function stackChainage(site: Site, widthPx: number, asked?: Scale) {
 }
 
 /** What all rows share, and the width of the elevations. */
-function layOut(input: StackInput): {
+function layOut(
+  input: StackInput,
+  canPush: boolean,
+): {
   readonly shared: StackSheet;
   readonly bodyPx: number;
   readonly narrow: boolean;
@@ -49,6 +52,7 @@ function layOut(input: StackInput): {
     input.site,
     input.widthPx,
     input.scale,
+    canPush,
   );
   const largest = Math.max(0, ...input.options.map((option) => option.cost.p90));
   const values = spreadValues(
@@ -76,7 +80,7 @@ function layOut(input: StackInput): {
  * click or key; `listenToStack` turns that into an event.
  */
 export function stack(input: StackInput): Piece {
-  const { shared, bodyPx, narrow } = layOut(input);
+  const { shared, bodyPx, narrow } = layOut(input, true);
   return narrow ? narrowStack(shared) : wideStack(shared, bodyPx);
 }
 
@@ -86,7 +90,7 @@ export function stack(input: StackInput): Piece {
  * @param firstPx room on the page on which it begins, under what stands there already
  */
 export function stackOnPaper(input: StackInput, heightPx: number, firstPx = heightPx): Piece[] {
-  const { shared, bodyPx } = layOut(input);
+  const { shared, bodyPx } = layOut(input, false);
   const roomOn = (page: number): number => (page === 0 ? firstPx : heightPx) - stackHead - stackFoot;
   const parts: AppraisedOption[][] = [];
   let left = 0;

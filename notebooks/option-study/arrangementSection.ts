@@ -145,7 +145,11 @@ export function arrangementSection(
       wide: true,
       body: (v, room) => {
         if (!v.reference) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
-        const { drawnPx: widthPx, scale, shown } = stackChainage(v.site, room.widthPx);
+        const {
+          drawnPx: widthPx,
+          scale,
+          shown,
+        } = stackChainage(v.site, room.widthPx, undefined, room.paperPx === null);
         return [
           inRoom(
             roadProfile({ site: v.site, option: v.reference, widthPx, scale, shown, prefix: 'road' }),

@@ -53,7 +53,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
           site: v.site,
           option: v.reference,
           obstacles: v.brief.obstacles,
-          ...sheetIn(v.site, room.widthPx),
+          ...sheetIn(v.site, room.widthPx, room.paperPx === null),
           prefix: 'crossing',
           ...(room.paperPx === null && { handles: v.hands }),
         }),
@@ -61,7 +61,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
         'Crossing',
       ),
     notes: (v, room) => {
-      const { scale, widthPx } = sheetIn(v.site, room.widthPx);
+      const { scale, widthPx } = sheetIn(v.site, room.widthPx, room.paperPx === null);
       const has = crossingHas(scale, widthPx);
       return [
         asItStandsNote(v.asItStands, v.books.currency),
@@ -109,7 +109,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
             plan({
               site: v.site,
               option: v.reference,
-              ...sheetIn(v.site, room.widthPx),
+              ...sheetIn(v.site, room.widthPx, room.paperPx === null),
               prefix: 'plan',
               bar: true,
             }),

@@ -84,7 +84,7 @@ function warningsTable(options: readonly AppraisedOption[]): HTMLElement {
           'tr',
           {},
           h('th', { scope: 'row', class: 'limit' }, ruling.effect),
-          h('td', {}, listed(numbers.map(String))),
+          h('td', {}, listed(numbers.toSorted((a, b) => a - b).map(String))),
           h('td', { class: 'text' }, words),
           h('td', { class: 'text source' }, ruling.source),
         ),

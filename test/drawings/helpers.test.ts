@@ -89,6 +89,11 @@ describe('a long crossing on a narrow sheet', () => {
     for (const roomPx of [1224, 868, 372])
       expect(sheetIn(longest, roomPx).scale).toBe(stackChainage(longest, 1224).scale);
     expect(sheetIn(site, 372).widthPx).toBe(372);
+    // On paper nothing is pushed: the sheet is as wide as its room.
+    expect(sheetIn(long, 980, false)).toEqual({ scale: 10_000, widthPx: 980 });
+    const onPaper = stackChainage(long, 980, undefined, false);
+    expect(onPaper.scale).toBe(10_000);
+    expect(onPaper.drawnPx).toBeLessThanOrEqual(980);
   });
 
   it('inRoom(drawing, roomPx, label) is pushed sideways only where it is wider than the room', () => {
