@@ -6,6 +6,7 @@ import { idle, share, untilDragRests, whenIdle, type StudyStore } from '../page/
 import type { Graph } from '../reactive/index.ts';
 import { askedOf } from '../worked/askedOf.ts';
 import type { Appraiser } from '../worker/index.ts';
+import { rehearsal } from './rehearsal.ts';
 
 /** What the sections of the option study show, and how each hangs on the slices of the study. */
 export type StudyCells = ReturnType<typeof studyCells>;
@@ -113,7 +114,8 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     },
     { policy: 'latest' },
   );
-  // What a drag will ask for at its first move: the draws are drawn by then. Not before everything else is there.
+  const rehearse = rehearsal((study, option) => appraiseKept(study, option, kept));
+  // Not before everything else is there.
   graph.watch(byDepth, (state) => {
     if (state.state !== 'ready') return;
     whenIdle(() => {
@@ -121,8 +123,13 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
       if (answer.state !== 'ready' || now.state !== 'ready' || views.state !== 'ready') return;
       // While there is no answer yet the reference has just been worked out like this anyway.
       if (answer.value?.asked !== now.value) return;
-      const option = held(now.value, answer.value, views.value.reference);
-      if (option !== undefined) appraiseKept(now.value, option, kept);
+      const study = now.value;
+      const option = held(study, answer.value, views.value.reference);
+      const isStill = (): boolean => {
+        const then = graph.state(asked);
+        return then.state === 'ready' && then.value === study;
+      };
+      if (option !== undefined) rehearse(study, option, isStill);
     });
   });
   const hold = graph.input<Hold | null>('hold', null);
