@@ -205,7 +205,7 @@ const asked = process.argv.slice(2);
 const outDir = mkdtempSync(join(tmpdir(), 'spanledger-'));
 const configFile = resolve(import.meta.dirname, '../../vite.config.ts');
 await build({ configFile, logLevel: 'silent', build: { outDir } });
-const site = await openSite(outDir);
+const site = await openSite(outDir, true);
 try {
   for (const example of asked.length > 0 ? asked : exampleNames) {
     const { page, heard } = await site.open('about:blank');
