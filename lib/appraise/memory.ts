@@ -50,7 +50,7 @@ export interface SiteMemory {
 }
 
 /** One set of draws and the rates put on it so far, by item and the points of the rate. */
-export interface DrawsMemory {
+interface DrawsMemory {
   readonly draws: Draws;
   readonly rates: Kept<Float64Array>;
 }

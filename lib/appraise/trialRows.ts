@@ -32,7 +32,7 @@ export interface FormAndMethod {
 }
 
 /** Money of measured lines at one rate per item. */
-export type CostOf = (lines: readonly MeasuredLine[]) => number;
+type CostOf = (lines: readonly MeasuredLine[]) => number;
 
 const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.item === 'method-setup';
 

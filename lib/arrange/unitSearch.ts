@@ -12,7 +12,7 @@ import { boundWays } from './worthFollowing.ts';
 const SLACK = sameShare;
 
 /** Indices into `X` of the supports of a layout, when they are asked for. */
-export type Trace = () => number[];
+type Trace = () => number[];
 
 /**
  * Called for every end, number of spans and governing span that can be laid out; `trace()`, to be called at once, gives

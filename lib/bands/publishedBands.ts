@@ -20,7 +20,7 @@ const schema = z.strictObject({
 });
 
 /** Laws of published quantities, from `data/published-bands.json`. */
-export const bandLaws = schema.parse(raw).bands;
+const bandLaws = schema.parse(raw).bands;
 
 export type BandColumn = (typeof bandLaws)[number]['column'];
 

@@ -115,7 +115,7 @@ export interface Demands {
 }
 
 export const gasMains = ['none', 'outside', 'inside'] as const;
-export type GasMain = (typeof gasMains)[number];
+type GasMain = (typeof gasMains)[number];
 
 export const tieIns = ['moves', 'fixed'] as const;
 export type TieIn = (typeof tieIns)[number];
@@ -294,11 +294,11 @@ export interface KeptOption {
 }
 
 /** Empty until the deciding pages are built; kept in the file so that nothing is lost. */
-export interface Priorities {
+interface Priorities {
   readonly weights: Readonly<Record<string, number>>;
 }
 
-export interface Note {
+interface Note {
   readonly about: string;
   readonly text: string;
   readonly author: string;

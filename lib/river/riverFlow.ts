@@ -27,7 +27,7 @@ function square(section: FloodSection, cosSkew: number): FloodSection {
 }
 
 /** Cosine of the skew at which the road crosses; piers stand along the flow. Square where the skew is not known. */
-export const cosineOfSkew = ({ skewDeg }: Pick<Site, 'skewDeg'>): number =>
+const cosineOfSkew = ({ skewDeg }: Pick<Site, 'skewDeg'>): number =>
   Math.cos(((skewDeg ?? 0) * Math.PI) / 180);
 
 /** Whether the flood of a water reaches between the abutments. */

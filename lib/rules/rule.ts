@@ -2,7 +2,7 @@ import { z } from '../zod.ts';
 import { families, formIds } from '../model/index.ts';
 
 /** Comparators of a condition. Text and yes/no facts take `=` and `!=` only. */
-export const comparators = ['<', '<=', '>', '>=', '=', '!='] as const;
+const comparators = ['<', '<=', '>', '>=', '=', '!='] as const;
 export type Comparator = (typeof comparators)[number];
 
 /** A fact against a written limit. */

@@ -65,7 +65,7 @@ const clears = (crest: Crest, needs: readonly Need[], toleranceM = LEVEL_TOLERAN
   needs.every(({ chainageM, levelM }) => crestLevelAt(crest, chainageM) >= levelM - toleranceM);
 
 /** The flattest crest between two levels that clears everything; null where even the sharpest does not. */
-export function flattestCrest(
+function flattestCrest(
   layout: Layout,
   needs: readonly Need[],
   startLevelM: number,

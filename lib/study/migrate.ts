@@ -2,7 +2,7 @@
 export type Migration = (old: Readonly<Record<string, unknown>>) => Record<string, unknown>;
 
 /** Steps by the version they start from. Version 1 is the first, so there are none yet. */
-export const migrations: Readonly<Record<number, Migration>> = {};
+const migrations: Readonly<Record<number, Migration>> = {};
 
 /**
  * Brings raw content from version `from` to version `to`, one step at a time.

@@ -2,7 +2,7 @@ import type { Problem, Result } from '../model/index.ts';
 import { problem } from './problem.ts';
 
 /** Largest study file, characters of JSON. */
-export const largestStudy = 5_000_000;
+const largestStudy = 5_000_000;
 
 const DEEPEST = 64;
 const barredKeys: ReadonlySet<string> = new Set(['__proto__', 'constructor', 'prototype']);

@@ -28,7 +28,7 @@ export interface Walls {
 }
 
 /** Bars of an abutment, kg/m3, by its kind and whether the deck is cast in (published ratios, see the data file). */
-export function abutmentBars(kind: AbutmentWall, integral: boolean): number {
+function abutmentBars(kind: AbutmentWall, integral: boolean): number {
   const { abutment } = substructureData;
   if (kind === 'spill-through')
     return integral ? abutment.spillThroughIntegralBarsKgM3 : abutment.spillThroughBarsKgM3;
@@ -37,7 +37,7 @@ export function abutmentBars(kind: AbutmentWall, integral: boolean): number {
 }
 
 /** Columns under the beam of a spill-through abutment. */
-export const spillColumns = (deckWidthM: number): number =>
+const spillColumns = (deckWidthM: number): number =>
   Math.max(2, Math.ceil(deckWidthM / substructureData.abutment.columnSpacingM));
 
 /** Walls of an abutment of a kind between its levels; stem thickness and columns are by height (common practice). */

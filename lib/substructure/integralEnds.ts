@@ -8,7 +8,7 @@ import { upliftKN } from './supportLines.ts';
 const castIn: ReadonlySet<string> = new Set(['slab', 'girder', 'box']);
 
 /** Movement at either end of a deck cast into both abutments, mm, both ways together: it grows from its middle. */
-export function integralMovement(units: readonly Unit[], designs: readonly Design[]): number {
+function integralMovement(units: readonly Unit[], designs: readonly Design[]): number {
   const x = units[0]!.supportsM;
   return jointMovement(deckMaterial(designs[0]!), (x.at(-1)! - x[0]!) / 2);
 }

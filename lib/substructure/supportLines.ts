@@ -25,7 +25,7 @@ export function upliftKN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficLeastKN'>
 }
 
 /** Elements of an expansion joint of 80 mm each for a movement, mm; 0 where there is none. */
-export function jointElements(movementMm: number): number {
+function jointElements(movementMm: number): number {
   return Math.ceil(movementMm / substructureData.movement.jointGroupMm - 1e-9);
 }
 

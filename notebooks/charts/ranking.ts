@@ -34,7 +34,7 @@ export interface RankingInput {
 }
 
 /** Number and glyph of an option as a small drawing of its own, for tables and running text. */
-export function optionMark(
+function optionMark(
   option: Pick<AppraisedOption, 'number' | 'form'>,
   reference: number | null,
   paper: Paper = 'colour',

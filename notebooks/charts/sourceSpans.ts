@@ -17,7 +17,7 @@ import { referenceMarks, type ReferenceMark } from './referenceMarks.ts';
 import type { Table } from './table.ts';
 
 /** What one source says of a form; an end it leaves open is null. */
-export interface SourceSpan {
+interface SourceSpan {
   readonly fromM: number | null;
   readonly toM: number | null;
   /** What exactly it speaks of. */

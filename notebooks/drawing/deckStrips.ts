@@ -25,8 +25,7 @@ export interface DeckStripsInput {
 }
 
 /** Height of a deck drawing above its soffit line, px: what stands under it begins here. */
-export const deckFootPx = (scale: Scale): number =>
-  Math.ceil(18 + (heights.parapet + 0.75) * pxPerMetre(scale));
+const deckFootPx = (scale: Scale): number => Math.ceil(18 + (heights.parapet + 0.75) * pxPerMetre(scale));
 
 interface Place {
   readonly x: (xM: number) => number;

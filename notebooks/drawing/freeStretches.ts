@@ -8,7 +8,7 @@ export interface Stretch {
 }
 
 /** Stretches barred to supports, with half a pier and its working space on either side, in order; touching ones as one. */
-export function barredToPiers(site: Site): (Stretch & { readonly name: string })[] {
+function barredToPiers(site: Site): (Stretch & { readonly name: string })[] {
   const hard = site.zones
     .filter((zone) => zone.hard)
     .map(({ fromM, toM, name }) => ({

@@ -5,7 +5,7 @@ import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { sheet } from './sheet.ts';
 
-export interface KeySection {
+interface KeySection {
   readonly number: number;
   readonly name: string;
   /** Where it leads, e.g. '#s3'. */

@@ -19,7 +19,7 @@ import { extentOf, lowestOf, structureOf, webPlaces } from './sectionGeometry.ts
 import { sheet } from './sheet.ts';
 
 /** Words on a leader to a point of the section. */
-export interface Callout {
+interface Callout {
   readonly xM: number;
   readonly zM: number;
   readonly words: string;

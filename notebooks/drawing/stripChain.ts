@@ -22,7 +22,7 @@ export interface StripChainInput {
 /** From the top of a chain to its dimension line, px. */
 export const CHAIN_TOP_PX = 12;
 /** Under the words to the foot of the chain, px: the overall dimension. */
-export const CHAIN_FOOT_PX = 30;
+const CHAIN_FOOT_PX = 30;
 
 /** Dimension lines under a deck: its strips, room for the words of each, and the overall width at the foot. */
 export function stripChain({ edges, leaders, wordsPx, overallM, marginPx, what }: StripChainInput): Piece {

@@ -10,7 +10,7 @@ import { printDrawing } from './printDrawing.ts';
 const forHands = /^(?:handles?|bays|feet|free)\b/u;
 
 /** A drawing without its handles. */
-export function withoutHandles(piece: Piece): Piece {
+function withoutHandles(piece: Piece): Piece {
   return {
     ...piece,
     children: piece.children.flatMap((child) =>

@@ -91,7 +91,7 @@ export interface Refusal {
 export const smallestStep = (places: number): number => Number(`1e-${String(places)}`);
 
 /** Rounded to the places shown, so that what is kept is what is read. */
-export const atPlaces = (value: number, places: number): number => Number(value.toFixed(places));
+const atPlaces = (value: number, places: number): number => Number(value.toFixed(places));
 
 /** Judges a value against the limits; an open limit allows the next value that can be told from it. */
 export function judgeFigure(value: Figure, rules: FigureRules): Refusal | null {

@@ -5,7 +5,7 @@ import { heldWords } from './heldWords.ts';
 type Valued = Pick<Figure, 'path' | 'value' | 'unit'>;
 
 /** A unit as it is printed: 'kg/m2' -> 'kg/m²', 'EUR/kg' -> '€/kg', 'deg' -> '°'; a count has none. */
-export function unitWords(unit: string): string {
+function unitWords(unit: string): string {
   if (unit === 'no') return '';
   return unit
     .replace(/\b[A-Z]{3}\b/u, (currency) => currencySign(currency))

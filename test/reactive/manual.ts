@@ -1,7 +1,7 @@
 import type { SlowRun } from '../../notebooks/reactive/index.ts';
 
 /** One started run of a slow cell under the hand of a test. */
-export interface ManualRun<V, T> {
+interface ManualRun<V, T> {
   readonly values: V;
   readonly run: SlowRun;
   readonly finish: (value: T) => Promise<void>;

@@ -12,7 +12,7 @@ import { adjacentData } from './adjacentData.ts';
 const shearShare = 1 / 2.4;
 
 /** Bredt cell of a box with its topping on the top slab, and its torsion constant, m4. */
-export function boxCell(task: UnitTask, { shape }: BeamChoice, slabM: number): Cell & { constantM4: number } {
+function boxCell(task: UnitTask, { shape }: BeamChoice, slabM: number): Cell & { constantM4: number } {
   const { topM, bottomM, webM } = adjacentData.box[task.standard];
   const wideM = shape.acrossM - webM;
   const top = topM + slabM;
@@ -27,7 +27,7 @@ export function boxCell(task: UnitTask, { shape }: BeamChoice, slabM: number): C
 }
 
 /** The deck as beams hinged in their keys: the grout carries shear, no moment across is counted on. */
-export function hingedBoxes(task: UnitTask, choice: BeamChoice, composite: CompositeBeam): LinkedBeams {
+function hingedBoxes(task: UnitTask, choice: BeamChoice, composite: CompositeBeam): LinkedBeams {
   const { ecmMPa } = concrete(task.standard, materials.concreteDefaultMPa[task.standard].girder);
   return {
     offsetsM: choice.layout.offsetsM,

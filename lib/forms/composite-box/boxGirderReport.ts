@@ -10,7 +10,7 @@ import { tubConstants } from './tubTorsion.ts';
 const work: GirderFigures = { areaM2: 0, centroidM: 0, inertiaM4: 0 };
 
 /** Shear modulus of steel over that of concrete, for the ratio of their moduli: Poisson's ratio 0.3 and 0.2. */
-export function shearRatioOf(modularRatio: number): number {
+function shearRatioOf(modularRatio: number): number {
   return (modularRatio * 1.2) / 1.3;
 }
 

@@ -24,7 +24,7 @@ export function enclosedArea(shape: TubShape, slabM: number): number {
 }
 
 /** Walls of the closed box in steel: slab by its shear modulus, two webs, bottom plate. */
-export function closedWalls(
+function closedWalls(
   shape: TubShape,
   slabM: number,
   shearRatio: number,

@@ -69,7 +69,7 @@ export interface GirderModel {
 }
 
 /** Bottom plate of half a box and what belongs to it. */
-export interface BottomPlate {
+interface BottomPlate {
   readonly widthM: number;
   readonly leastM: number;
   /** Length of the leaning web over its height. */

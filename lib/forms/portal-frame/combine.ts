@@ -6,7 +6,7 @@ import type { FrameTraffic, TrafficRange } from './frameTraffic.ts';
 export type Action = readonly (readonly [effects: ChainEffects | null, factor: number])[];
 
 /** Shares of vehicles and uniform load, with braking either way beside them. */
-export interface TrafficShare {
+interface TrafficShare {
   readonly vehicle: number;
   readonly uniform: number;
   readonly brakingKN: number;

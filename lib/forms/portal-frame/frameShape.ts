@@ -9,7 +9,7 @@ import { wingLength } from '../slab/slabSection.ts';
 import { portalData } from './portalData.ts';
 
 /** A section across the frame: of the deck, or of a wall over its whole width. */
-export interface FrameSection {
+interface FrameSection {
   readonly part: 'left wall' | 'deck' | 'right wall' | 'middle wall';
   readonly depthM: number;
   readonly areaM2: number;

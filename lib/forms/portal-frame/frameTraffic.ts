@@ -15,7 +15,7 @@ export interface TrafficRange {
 }
 
 /** Loads of all lanes on the feet: one span full with the vehicles in its middle, all full with the vehicles over a wall. */
-export interface LanesOnFeet {
+interface LanesOnFeet {
   readonly inSpan: readonly (readonly WallLoad[])[];
   readonly overWall: readonly (readonly WallLoad[])[];
 }

@@ -34,7 +34,7 @@ export function closedCell(
 }
 
 /** The deck as closed troughs linked by the slab between their webs. */
-export function linkedTroughs(task: UnitTask, choice: BeamChoice, composite: CompositeBeam): LinkedBeams {
+function linkedTroughs(task: UnitTask, choice: BeamChoice, composite: CompositeBeam): LinkedBeams {
   const { girder, slab } = materials.concreteDefaultMPa[task.standard];
   const eKNm2 = concrete(task.standard, girder).ecmMPa * 1e3;
   const slabKNm2 = concrete(task.standard, slab).ecmMPa * 1e3;

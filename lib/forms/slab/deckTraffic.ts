@@ -11,7 +11,7 @@ import type { UnitTask } from '../../model/index.ts';
 import type { WheelStrips } from './wheelStrips.ts';
 
 /** Greatest and least moments and shears at the stations, kNm and kN. */
-export interface MomentsAndShears {
+interface MomentsAndShears {
   readonly momentMaxKNm: Float64Array;
   readonly momentMinKNm: Float64Array;
   readonly shearMaxKN: Float64Array;

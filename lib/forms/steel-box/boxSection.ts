@@ -31,7 +31,7 @@ const webRib = stiffenerOf(steelBoxData.web.ribHeightM);
 const spanRib = stiffenerOf(steelBoxData.bottom.spanRibM);
 
 /** Stiffeners along one web that is `heightM` high. */
-export function webRibs(model: SteelBoxModel, heightM: number): number {
+function webRibs(model: SteelBoxModel, heightM: number): number {
   return Math.max(0, Math.ceil((model.layout.slant * heightM) / steelBoxData.web.panelM - 1e-9) - 1);
 }
 
@@ -63,7 +63,7 @@ export function stiffenedWebOf(model: SteelBoxModel, heightM: number, webM: numb
 }
 
 /** Area of all stiffeners along the webs and along the bottom plate, m2, and their mass, kg/m. */
-export function ribAreas(
+function ribAreas(
   model: SteelBoxModel,
   heightM: number,
   pressed: boolean,

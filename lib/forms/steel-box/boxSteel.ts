@@ -194,7 +194,7 @@ function diaphragmKg(model: SteelBoxModel, effects: BoxEffects | null, support: 
 }
 
 /** Design reaction of the whole deck at a support, kN. */
-export function designReaction({ standard }: SteelBoxModel, effects: BoxEffects, support: number): number {
+function designReaction({ standard }: SteelBoxModel, effects: BoxEffects, support: number): number {
   const { uls } = standard.factors;
   const { own, superimposed, traffic } = effects;
   return (

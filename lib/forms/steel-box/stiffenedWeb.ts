@@ -19,7 +19,7 @@ export interface StiffenedWeb {
 }
 
 /** Slenderness in shear over the whole web and over one panel between its stiffeners: the greater (EN 1993-1-5 5.3 and A.3, from memory). */
-export function webShearSlenderness(web: StiffenedWeb): number {
+function webShearSlenderness(web: StiffenedWeb): number {
   const { depthM, postM, thicknessM, ribs, ribM4, fyMPa } = web;
   const base = 37.4 * thicknessM * yieldRatio(fyMPa);
   const whole = depthM / (base * Math.sqrt(wholeFactor(web)));

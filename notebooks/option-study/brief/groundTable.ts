@@ -14,7 +14,7 @@ const list: Path = ['brief', 'crossing', 'ground'];
 const MOST_SHOWN = 240;
 
 /** Halfway to the next point, or as far beyond the last one as that is from the one before. */
-export function pointAfter(ground: readonly ProfilePoint[], index: number): ProfilePoint {
+function pointAfter(ground: readonly ProfilePoint[], index: number): ProfilePoint {
   const at = ground[index]!;
   const next = ground[index + 1];
   const before = ground[index - 1] ?? at;

@@ -12,7 +12,7 @@ import { problemBeside } from './problemBeside.ts';
 const list: Path = ['brief', 'obstacles'];
 
 /** An obstacle that changes nothing until it is said where it lies and what it asks for: 10 m in the middle. */
-export function newObstacle({ brief }: Study): Obstacle {
+function newObstacle({ brief }: Study): Obstacle {
   const middleM = Math.round((brief.crossing.startM + brief.crossing.endM) / 2);
   return {
     kind: 'road',

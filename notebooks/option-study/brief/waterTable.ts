@@ -9,7 +9,7 @@ import { problemBeside } from './problemBeside.ts';
 const list: Path = ['brief', 'waters'];
 
 /** A water at the lowest ground between the abutments, standing no deeper than that ground; its flood is not known. */
-export function newWater({ brief }: Study): Water {
+function newWater({ brief }: Study): Water {
   const { startM, endM, ground } = brief.crossing;
   const between = ground.filter(({ chainageM }) => chainageM > startM && chainageM < endM);
   const lowest = (between.length > 0 ? between : ground).reduce((low, point) =>

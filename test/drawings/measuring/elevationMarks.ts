@@ -2,7 +2,7 @@ import type { Paper } from './paper.ts';
 import { boxOf, crossedAt, having, parts, runsOf, type Node, type XY } from './svg.ts';
 
 /** A support as it is drawn, px. */
-export interface SupportMarks {
+interface SupportMarks {
   readonly x: number;
   /** Underside of the deck over it, down to the bearings; NaN where it is drawn in one with the deck. */
   readonly bearing: { readonly top: number; readonly bottom: number } | null;

@@ -64,7 +64,7 @@ export interface PrecastModel extends BeamChoice {
 }
 
 /** Superimposed load and traffic of one span by itself, characteristic and the service share. */
-export interface SimpleSpan {
+interface SimpleSpan {
   readonly superimposed: Effects;
   readonly most: TrafficEnvelope;
   readonly service: TrafficEnvelope;
