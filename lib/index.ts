@@ -16,6 +16,7 @@ export {
 } from './appraise/parts.ts';
 export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
 export { choiceProblems } from './appraise/choiceProblems.ts';
+export { depthMissed } from './appraise/depthMissed.ts';
 export { depthTrials } from './appraise/depthTrials.ts';
 export { formFacts } from './appraise/facts.ts';
 export { PIER_HALF_WIDTH_M } from './appraise/requestFor.ts';

@@ -5,6 +5,7 @@ export {
   abutmentWindows,
   billParts,
   constructionDepth,
+  depthMissed,
   families,
   familyOf,
   formIds,

@@ -1,8 +1,10 @@
 import { leastCostDepth } from '../appraise/leastCostDepth.ts';
+import { depthMissed } from '../appraise/depthMissed.ts';
 import { depthRange } from '../appraise/depthRange.ts';
+import { liftedSupports } from '../appraise/liftedSupports.ts';
 import { finish } from '../appraise/work.ts';
 import { formModule, sizeableForms } from '../forms/index.ts';
-import type { DeckStrip, FormId, Problem, StandardId, UnitTask } from '../model/index.ts';
+import type { DeckStrip, Design, FormId, Problem, StandardId, UnitTask } from '../model/index.ts';
 import { standardIds } from '../model/index.ts';
 import { meanRates, ratesFor } from '../price/index.ts';
 import { deckSpec } from '../site/index.ts';
@@ -30,9 +32,14 @@ const flagNames = [
   'light-middles',
   'ballast',
 ];
+/** The least and the most that can be asked for as a depth, m. */
+const FLATTEST_M = 0.01;
+const DEEPEST_M = 40;
 const SURFACING_M = 0.09;
 /** Barriers take what the carriageway leaves of the width, half on each side. */
 const BARRIERS_M = 1;
+/** No traffic lane is marked narrower, m (common practice, no source). */
+const LEAST_LANE_M = 2.5;
 
 function oneOf<T extends string>(
   name: string,
@@ -68,29 +75,43 @@ function numbersFlag(flags: Flags, name: string, problems: Problem[]): number[] 
   return undefined;
 }
 
-/** Flags that ask for a choice of a form, by the choice. */
-const choiceFlags = {
+/** Flags that ask for what some forms read, by what they ask for. */
+const formFlags = {
+  girders: ['girders'],
+  haunch: ['haunch'],
   boxWidthM: ['box-width'],
   strengthMPa: ['strength'],
   light: ['light', 'light-middles'],
   ballastKNm: ['ballast'],
 } as const;
-type ChosenHere = keyof typeof choiceFlags;
+type AskedHere = keyof typeof formFlags;
+type ChosenHere = Exclude<AskedHere, 'girders' | 'haunch'>;
 
-/** What is asked of a concrete box besides the usual: its width, strength, lightweight concrete, ballast. */
-function choicesOf(flags: Flags, form: FormId | undefined, problems: Problem[]): Pick<UnitTask, ChosenHere> {
-  const has = (id: FormId, choice: ChosenHere): boolean => formModule(id).choices?.includes(choice) === true;
-  for (const [choice, names] of Object.entries(choiceFlags) as [ChosenHere, readonly string[]][]) {
+/** Whether a form reads what a flag asks for. */
+function readsFlag(id: FormId, asked: AskedHere): boolean {
+  const { choices = [], reads = [] } = formModule(id);
+  return [...choices, ...reads].includes(asked);
+}
+
+/** A problem for each flag given that the form does not read. */
+function foreignFlags(flags: Flags, form: FormId): Problem[] {
+  return (Object.entries(formFlags) as [AskedHere, readonly string[]][]).flatMap(([asked, names]) => {
     const given = names.filter((name) => flags.values[name] !== undefined);
-    if (form && given.length > 0 && !has(form, choice))
-      problems.push({
+    if (given.length === 0 || readsFlag(form, asked)) return [];
+    return [
+      {
         code: 'unknown-key',
         path: [`--${given[0]!}`],
-        expected: `a form that reads it: ${sizeableForms.filter((id) => has(id, choice)).join(', ')}`,
+        expected: `a form that reads it: ${sizeableForms.filter((id) => readsFlag(id, asked)).join(', ')}`,
         received: form,
         remedy: `leave --${given.join(' and --')} out`,
-      });
-  }
+      } satisfies Problem,
+    ];
+  });
+}
+
+/** What is asked of a concrete box besides the usual: its width, strength, lightweight concrete, ballast. */
+function choicesOf(flags: Flags, problems: Problem[]): Pick<UnitTask, ChosenHere> {
   if (flags.values['light-middles'] !== undefined) needFlags(flags, ['light'], problems);
   const positive = (name: string, unit: string): number | undefined =>
     numberFlag(flags, name, { above: 0, unit }, problems);
@@ -112,7 +133,7 @@ function choicesOf(flags: Flags, form: FormId | undefined, problems: Problem[]):
 /** A fault of a form at the flag that asked for it. */
 function atFlag(fault: Problem): Problem {
   const [choice, ...rest] = fault.path;
-  const names: readonly string[] = choiceFlags[choice as ChosenHere];
+  const names: readonly string[] = formFlags[choice as AskedHere];
   const name = names.at(rest[0] === 'middleM' ? 1 : 0)!;
   return { ...fault, path: [`--${name}`, ...rest.filter((step) => typeof step === 'number')] };
 }
@@ -154,7 +175,7 @@ function readTask(argv: readonly string[]): Asked {
     numberFlag(flags, name, { above: 0, most, unit: 'm' }, problems);
   const widthM = metres('width', 60);
   const lanes = numberFlag(flags, 'lanes', { above: 0, most: 16, whole: true, unit: 'lanes' }, problems);
-  const depthM = metres('depth', 40);
+  const depthM = metres('depth', DEEPEST_M);
   const haunch =
     numberFlag(flags, 'haunch', { above: 1, most: 4, unit: 'times the midspan depth' }, problems) ?? 1;
   const carriagewayM = metres('carriageway', 60) ?? (widthM === undefined ? undefined : widthM - BARRIERS_M);
@@ -171,7 +192,8 @@ function readTask(argv: readonly string[]): Asked {
     standardIds,
     problems,
   );
-  const choices = choicesOf(flags, form, problems);
+  const choices = choicesOf(flags, problems);
+  if (form) problems.push(...foreignFlags(flags, form));
   needFlags(flags, ['width', 'lanes'], problems);
   if (widthM !== undefined && carriagewayM !== undefined && !(carriagewayM > 0 && carriagewayM <= widthM)) {
     problems.push({
@@ -181,6 +203,28 @@ function readTask(argv: readonly string[]): Asked {
       received: String(carriagewayM),
       unit: 'm',
       remedy: 'give the width between kerbs',
+    });
+  }
+  const closesM = spansM.reduce((sum, span) => sum + span, 0) / (2 * Math.PI);
+  const leastRadiusM = Math.max(closesM, (widthM ?? 0) / 2);
+  if (!(planRadiusM > leastRadiusM)) {
+    problems.push({
+      code: 'too-small',
+      path: ['--radius'],
+      expected: `more than half the deck width and no full circle, ${rounded(leastRadiusM)}`,
+      received: String(planRadiusM),
+      unit: 'm',
+      remedy: 'give a wider curve, or leave --radius out for a straight deck',
+    });
+  }
+  if (lanes !== undefined && carriagewayM !== undefined && carriagewayM / lanes < LEAST_LANE_M) {
+    problems.push({
+      code: 'too-large-value',
+      path: ['--lanes'],
+      expected: `on ${carriagewayM} m between kerbs at most ${Math.max(1, Math.floor(carriagewayM / LEAST_LANE_M))}`,
+      received: String(lanes),
+      unit: 'lanes',
+      remedy: 'give fewer lanes, or a wider deck or carriageway',
     });
   }
   if (form && formModule(form).pattern.kind === 'pylon' && spansM.length === 1) {
@@ -242,6 +286,31 @@ function depthSought(asked: Asked): number {
   );
 }
 
+/** The depth asked for, or that of least cost; a depth that the form cannot be made near to is refused. */
+function designOf(asked: Asked): Design {
+  const module = formModule(asked.task.form);
+  const sizeAt = (depthM: number): Design => module.size(taskAt(asked, depthM));
+  if (asked.depthM === undefined) return sizeAt(depthSought(asked));
+  const design = sizeAt(asked.depthM);
+  if (depthMissed(design) === null) return design;
+  // Beams come in steps of depth: whatever is asked for, none is shallower or deeper than these.
+  const [least, most] = [FLATTEST_M, DEEPEST_M].map((depthM) => sizeAt(depthM).depthM.midspan) as [
+    number,
+    number,
+  ];
+  if (asked.depthM >= least && asked.depthM <= most) return design;
+  return refuse([
+    {
+      code: asked.depthM < least ? 'too-small' : 'too-large-value',
+      path: ['--depth'],
+      expected: `a depth this form can be made with, ${rounded(least)} to ${rounded(most)}`,
+      received: String(asked.depthM),
+      unit: 'm',
+      remedy: 'give a depth between them, or leave --depth out for that of least cost',
+    },
+  ]);
+}
+
 /**
  * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
  * Without a depth the one of least cost in the published band is taken. Concrete boxes read `--box-width`
@@ -251,7 +320,8 @@ function depthSought(asked: Asked): number {
 export function sizeCommand(argv: readonly string[]): Said {
   const asked = readTask(argv);
   const { form, spansM, deck } = asked.task;
-  const design = formModule(form).size(taskAt(asked, asked.depthM ?? depthSought(asked)));
+  const design = designOf(asked);
+  const missed = depthMissed(design);
   const { superstructure, supports } = splitQuantities(design.lines);
   const deckAreaM2 = spansM.reduce((sum, span) => sum + span, 0) * deck.widthM;
   return {
@@ -267,7 +337,11 @@ export function sizeCommand(argv: readonly string[]): Said {
         checks: design.checks.map(({ id, label, utilisation }) => ({ id, label, utilisation })),
         limitingCheck: design.limitingCheck.id,
         ownWeightShare: design.ownWeightShare,
-        warnings: design.warnings,
+        warnings: [
+          ...(asked.depthM === undefined || missed === null ? [] : [missed]),
+          ...design.warnings,
+          ...liftedSupports(design),
+        ],
       }),
     ),
   };

@@ -35,6 +35,8 @@ export interface FormModule {
   readonly wallsInOne?: true;
   /** Of the choices of a variant those that the form has. */
   readonly choices?: readonly (keyof Variant)[];
+  /** Of what a task alone may ask for besides, what the form reads. */
+  readonly reads?: readonly ('girders' | 'haunch')[];
   /** Why a unit cannot be made as its choices ask, by paths of a variant; absent where nothing can be asked amiss. */
   faults?(task: Omit<UnitTask, 'depthM'>): readonly Problem[];
   /**

@@ -1,4 +1,4 @@
-import { fixed, use } from '../format.ts';
+import { significant, use } from '../format.ts';
 import type { Asked } from '../drawing/asked.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
@@ -104,8 +104,8 @@ export const checkTable = (input: CheckBarsInput): Table => ({
   head: ['check', 'demand', 'capacity', 'unit', 'utilisation'],
   rows: input.checks.map((check) => [
     check.label,
-    { text: fixed(check.demand, 1), figure: ofCheck(input, check, 'demand') },
-    { text: fixed(check.capacity, 1), figure: ofCheck(input, check, 'capacity') },
+    { text: significant(check.demand, 3), figure: ofCheck(input, check, 'demand') },
+    { text: significant(check.capacity, 3), figure: ofCheck(input, check, 'capacity') },
     check.unit,
     { text: use(check.utilisation), figure: ofCheck(input, check, 'utilisation') },
   ]),

@@ -7,11 +7,12 @@ import { use } from '../format.ts';
 import { h } from '../html.ts';
 import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { StudyCells } from './studyCells.ts';
+import { sizingWords } from './sizingWords.ts';
 import { firstOfEachForm } from './words.ts';
 
 /** Section 5: the cross-section of the reference with its checks, the others beside it. */
 export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
-  const { appraisal, reference } = cells;
+  const { appraisal, reference, options } = cells;
   const finding = page.live({ reference }, (v) =>
     v.reference
       ? [
@@ -63,6 +64,17 @@ export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
           ' Quick checks, not code verification. Stability while launching, lifting and cantilevering is not covered.',
         ),
       ],
+    }),
+    page.cell({
+      station: '5+015',
+      title: 'What sizing says of the reference',
+      shows: { reference, options },
+      body: (v) => {
+        if (!v.reference) return h('p', { class: 'prose' }, 'No option has been worked out yet.');
+        const { number } = v.reference;
+        const kept = v.options.kept.find((one) => one.number === number);
+        return sizingWords(v.reference, (kept?.depthM ?? null) !== null);
+      },
     }),
     page.cell({
       station: '5+020',

@@ -10,6 +10,7 @@ interface Sized {
   readonly checks: { id: string; utilisation: number }[];
   readonly limitingCheck: string;
   readonly depthM: { support: number; midspan: number };
+  readonly warnings: string[];
 }
 const size = (line: string): Sized => JSON.parse(answer(sizeCommand, line).out) as Sized;
 
@@ -43,6 +44,49 @@ describe('size', () => {
     expect(printed.out).toBe('');
     expect(printed.err).toMatch(/spans: expected .* received -60,80 m \(--spans\)\. give --spans like/);
     expect(printed.err).toMatch(/width: expected .* received wide/);
+  });
+
+  it('size(--depth) has the depth asked for, or says how deep the beams make it, or is refused with what they can make', () => {
+    const boxes = '--form adjacent-box --spans 25 --width 12 --lanes 2';
+    const near = size(`${boxes} --depth 1.2`);
+    expect(near.depthM.midspan).toBeLessThan(1.2);
+    expect(near.warnings[0]).toContain(
+      `1.20 m was asked for; with the beams there are it is ${near.depthM.midspan}`,
+    );
+    expect(size(`${boxes} --depth ${near.depthM.midspan}`).warnings).toEqual([]);
+    const refused = answer(sizeCommand, `${boxes} --depth 2.5`);
+    expect(refused.code).toBe(2);
+    const most = Number(/ to ([0-9.]+) m, received 2.5 m/.exec(refused.err)![1]);
+    expect(size(`${boxes} --depth ${most}`).depthM.midspan).toBe(most);
+  });
+
+  it.each([
+    [
+      'cantilever-box --spans 75,120,75 --haunch 1.2',
+      /haunch: expected .*composite-i, steel-box.* cantilever-box/,
+    ],
+    ['half-through --spans 40 --girders 5', /girders: expected .*precast-i.* received half-through/],
+    ['composite-i --spans 40 --lanes 8', /lanes: expected on 11 m between kerbs at most 4 lanes, received 8/],
+    ['composite-i --spans 300 --radius 40', /radius: expected .* no full circle, 47\.7.* received 40 m/],
+    [
+      'composite-i --spans 3 --radius 5',
+      /radius: expected more than half the deck width .*6 m, received 5 m/,
+    ],
+  ])('size(--form %s) is refused: it would be read by nothing or stand for no bridge', (line, said) => {
+    const lanes = line.includes('--lanes') ? '' : ' --lanes 2';
+    const printed = answer(sizeCommand, `--form ${line} --width 12${lanes}`);
+    expect(printed.code).toBe(2);
+    expect(printed.err).toMatch(said);
+  });
+
+  it('size(end spans a quarter of the main one) says that the ends lift; of end spans of three quarters it does not', () => {
+    // Ends of continuous beams lift under traffic at the ultimate limit below about half of the next span (statics).
+    const lifted = (spans: string): string[] =>
+      size(`--form concrete-box --spans ${spans} --width 12 --lanes 2 --depth 3`).warnings.filter((text) =>
+        text.includes('pulled up'),
+      );
+    expect(lifted('15,60,15')).toHaveLength(2);
+    expect(lifted('45,60,45')).toEqual([]);
   });
 
   it('size(cantilever-box --light) takes lightweight concrete, strength and ballast by span', () => {

@@ -15,5 +15,6 @@ export const adjacentBox: FormModule = {
   methods: ['crane'],
   joined: 'never',
   ignoresHeight: true,
+  reads: ['girders'],
   size: (task) => sizePrecast(boxBeams, task),
 };

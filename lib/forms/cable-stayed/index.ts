@@ -1,5 +1,5 @@
 import { trafficOnInfluence } from '../../actions/index.ts';
-import type { Design, SupportReaction, UnitTask } from '../../model/index.ts';
+import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
@@ -49,26 +49,14 @@ function size(task: UnitTask): Design {
     ownWeightShare: ownWeightShare(bridge),
     lines: cableLines(bridge, task),
     heaviestPiece: heaviestPiece(bridge),
-    warnings: [...overLimit(checks, 'plates, stays and legs'), ...warningsOf(bridge, task, reactions)],
+    warnings: [...overLimit(checks, 'plates, stays and legs'), ...warningsOf(bridge, task)],
     figures: figuresOf(bridge, task),
   };
 }
 
-function warningsOf(bridge: SizedBridge, task: UnitTask, reactions: readonly SupportReaction[]): string[] {
+function warningsOf(bridge: SizedBridge, task: UnitTask): string[] {
   const warnings: string[] = [];
   const { standard, layout } = bridge;
-  const last = reactions.length - 1;
-  reactions.forEach((reaction, i) => {
-    const { permanent, permanentFavourable, traffic } = standard.factors.uls;
-    const lasting = reaction.permanentKN * (reaction.permanentKN < 0 ? permanent : permanentFavourable);
-    const upliftKN = -(lasting + traffic * reaction.trafficMinKN);
-    if (upliftKN > 0) {
-      const name = i === 0 ? 'The first support' : i === last ? 'The last support' : `Support ${i + 1}`;
-      warnings.push(
-        `${name} is pulled up by ${(upliftKN / 1000).toFixed(1)} MN at ultimate: an anchor pier with a tie-down.`,
-      );
-    }
-  });
   if (bridge.lasting.slack)
     warnings.push(
       'The back span is longer than the main span: the anchor stays carry nothing under lasting load.',

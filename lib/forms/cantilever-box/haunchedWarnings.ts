@@ -1,14 +1,9 @@
-import type { SupportReaction } from '../../model/index.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
-/** What the engineer has to know of balance, of unequal arms and of ends that lift. */
-export function haunchedWarnings(
-  model: CantileverModel,
-  { weight }: SizedHaunched,
-  reactions: readonly SupportReaction[],
-): string[] {
+/** What the engineer has to know of balance and of unequal arms. */
+export function haunchedWarnings(model: CantileverModel, { weight }: SizedHaunched): string[] {
   const warnings: string[] = [];
   if (model.arms.length > 0)
     warnings.push(
@@ -33,15 +28,6 @@ export function haunchedWarnings(
             : '; tied down or weighted'
       }.`,
     );
-  }
-  const factor = model.standard.factors.uls.traffic;
-  for (const j of [0, reactions.length - 1]) {
-    const { permanentKN, trafficMinKN } = reactions[j]!;
-    const leastKN = permanentKN + factor * trafficMinKN;
-    if (leastKN < 0)
-      warnings.push(
-        `End bearing ${j === 0 ? 'of the first' : 'of the last'} span lifts by ${(-leastKN).toFixed(0)} kN at the ultimate limit: tied down or weighted.`,
-      );
   }
   return warnings;
 }

@@ -43,7 +43,7 @@ function size(task: UnitTask): Design {
   checkBoxTask(task);
   const { model, box, checks } = choosePierDepth(task);
   const reactions = haunchedReactions(model, box);
-  const warnings = [...overLimit(checks, 'tendons and concrete'), ...haunchedWarnings(model, box, reactions)];
+  const warnings = [...overLimit(checks, 'tendons and concrete'), ...haunchedWarnings(model, box)];
   if (!heightUnder(task).known)
     warnings.push(
       `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).assumedRoadM} m above ground.`,

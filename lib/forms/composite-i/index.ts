@@ -27,6 +27,7 @@ export const compositeI: FormModule = {
   methods: ['crane', 'launch'],
   ignoresHeight: true,
   choices: ['haunchRatio', 'substringers'],
+  reads: ['girders', 'haunch'],
   variants: girderVariants,
   leastDepthM,
   size,

@@ -16,5 +16,6 @@ export const precastI: FormModule = {
   pattern: { kind: 'continuous' },
   methods: ['crane'],
   joined: 'after-placing',
+  reads: ['girders'],
   size: (task) => (mustBeSpliced(task) ? sizeSpliced(task) : sizePrecast(iBeams, task)),
 };

@@ -15,5 +15,6 @@ export const precastTrough: FormModule = {
   methods: ['crane'],
   joined: 'after-placing',
   ignoresHeight: true,
+  reads: ['girders'],
   size: (task) => sizePrecast(troughs, task),
 };

@@ -26,6 +26,7 @@ export const steelBox: FormModule = {
   pattern: { kind: 'continuous' },
   alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.8] }],
   methods: ['balanced-cantilever', 'launch'],
+  reads: ['haunch'],
   size,
 };
 
@@ -56,7 +57,7 @@ function size(task: UnitTask): Design {
     ownWeightShare: steelBoxOwnShare(box),
     lines: steelBoxLines(box),
     heaviestPiece: steelBoxPiece(box),
-    warnings: [...overLimit(checks, 'plates'), ...steelBoxWarnings(box, reactions)],
+    warnings: [...overLimit(checks, 'plates'), ...steelBoxWarnings(box)],
     figures: steelBoxFigures(box),
   };
 }

@@ -47,24 +47,14 @@ export function steelBoxPiece({ model, steel }: SizedSteelBox): { lengthM: numbe
   return { lengthM, massT: (Math.max(...steel.ownKNm) * lengthM) / 9.81 };
 }
 
-/** What the engineer has to know of ends that lift and of heights that are assumed. */
-export function steelBoxWarnings(box: SizedSteelBox, reactions: readonly SupportReaction[]): string[] {
-  const { model } = box;
+/** What the engineer has to know of heights that are assumed. */
+export function steelBoxWarnings({ model }: SizedSteelBox): string[] {
   const warnings: string[] = [];
   const towers = temporaryTowers(model);
   if (towers.count > 0 && !towers.known)
     warnings.push(
       `Height under the deck is not given: towers are measured for a road ${steelBoxData.assumedHeightM.value} m above ground.`,
     );
-  const factor = model.standard.factors.uls.traffic;
-  for (const j of [0, reactions.length - 1]) {
-    const { permanentKN, trafficMinKN } = reactions[j]!;
-    const leastKN = permanentKN + factor * trafficMinKN;
-    if (leastKN < 0)
-      warnings.push(
-        `End bearing ${j === 0 ? 'of the first' : 'of the last'} span lifts by ${(-leastKN).toFixed(0)} kN at the ultimate limit: tied down or weighted.`,
-      );
-  }
   return warnings;
 }
 

@@ -1,0 +1,20 @@
+import { loadStandard } from '../actions/index.ts';
+import type { Design } from '../model/index.ts';
+
+/**
+ * A sentence for each support that the deck of a unit lifts from at the ultimate limit state: permanent load with the factor
+ * that is worse for it, traffic where it lifts.
+ */
+export function liftedSupports({ task, reactions }: Pick<Design, 'task' | 'reactions'>): string[] {
+  const { permanent, permanentFavourable, traffic } = loadStandard(task.standard).factors.uls;
+  return reactions.flatMap(({ permanentKN, trafficMinKN }, i) => {
+    const lastingKN = permanentKN * (permanentKN < 0 ? permanent : permanentFavourable);
+    const upliftMN = -(lastingKN + traffic * trafficMinKN) / 1000;
+    if (!(upliftMN > 0)) return [];
+    const support =
+      i === 0 ? 'The first support' : i === reactions.length - 1 ? 'The last support' : `Support ${i + 1}`;
+    return [
+      `${support} is pulled up by ${upliftMN.toFixed(2)} MN at the ultimate limit: tied down or weighted.`,
+    ];
+  });
+}
