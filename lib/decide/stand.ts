@@ -5,8 +5,8 @@ import { groupsOf } from './groupsOf.ts';
 import { oddsMatrix } from './oddsMatrix.ts';
 
 /**
- * Where the options stand on cost: order by median, odds on common draws, groups that cannot be separated, chance within the
- * budget, and the leader: the cheapest median among the options that no rule puts out. Nothing here looks at more than two
+ * Where the options stand on cost: order by median, odds on common draws, groups of those that no rule puts out that cannot
+ * be separated, chance within the budget, and the leader: the cheapest median among the options that no rule puts out. Nothing here looks at more than two
  * options at once, so adding or removing one never reorders the others.
  * Throws a RangeError when the options were not priced on the same number of draws or share a number.
  */
@@ -18,13 +18,15 @@ export function stand(
   check(options);
   const ordered = [...options].sort((a, b) => a.p50 - b.p50 || a.number - b.number);
   const odds = oddsMatrix(ordered);
-  const order = ordered.map((option) => option.number);
+  // An option that a rule puts out competes with none: it has odds, but stands in no group.
+  const inPlay = ordered.filter(({ status }) => status !== 'out');
+  const order = inPlay.map(({ number }) => number);
   const groups = groupsOf(order, odds, books.unseparated);
   const within: Record<number, number> = {};
   if (budget !== 'unknown') {
     for (const { number, totals } of ordered) within[number] = shareWithin(totals, budget.amount);
   }
-  const leader = ordered.find((option) => option.status !== 'out') ?? null;
+  const leader = inPlay[0] ?? null;
   return {
     leader: leader?.number ?? null,
     groups,

@@ -57,7 +57,7 @@ function brackets(
     .filter((group) => group.length > 1)
     .map((group) => {
       const places = group.map((number) => at.get(number) ?? 0);
-      return { group, from: Math.min(...places), to: Math.max(...places) };
+      return { group, places, from: Math.min(...places), to: Math.max(...places) };
     })
     .sort((a, b) => a.from - b.from || a.to - b.to);
   const ends: number[] = [];
@@ -72,10 +72,13 @@ function brackets(
   const lane = besides === 0 ? 0 : Math.min(9, (room - 8 - WORDS_PX) / besides);
   const wordsX = x + besides * lane + 8;
   let lastFoot = -Infinity;
-  return runs.map(({ group, from, to }, index) => {
+  return runs.map(({ group, places, from, to }, index) => {
     const left = x + (lanes[index] ?? 0) * lane;
     const top = yOf(from) - pitch * 0.32;
     const bottom = yOf(to) + pitch * 0.32;
+    // Where an option that a rule puts out stands between them, those that are meant are ticked.
+    const isWhole = places.length === to - from + 1;
+    const ticks = isWhole ? '' : places.map((row) => `M${num(left - 5)},${num(yOf(row))}h5`).join('');
     const heads = wrapText('cannot be separated', room - (wordsX - x), letters.drawing, 600);
     const lines = wrapText(groupOdds(group, standing), room - (wordsX - x), letters.drawing);
     const high = (heads.length + lines.length) * 14;
@@ -84,7 +87,7 @@ function brackets(
     return g(
       {},
       el('path', {
-        d: `M${num(left - 5)},${num(top)}h5V${num(bottom)}h-5`,
+        d: `M${num(left - 5)},${num(top)}h5V${num(bottom)}h-5${ticks}`,
         fill: 'none',
         stroke: colours.ink,
         'stroke-width': pens.medium,

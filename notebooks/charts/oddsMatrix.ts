@@ -64,6 +64,17 @@ function square(
   );
 }
 
+/** Places that follow one another without a gap, each run by its first and last. */
+function inRow(places: readonly number[]): { readonly from: number; readonly to: number }[] {
+  const runs: { from: number; to: number }[] = [];
+  for (const place of [...places].sort((a, b) => a - b)) {
+    const last = runs.at(-1);
+    if (last?.to === place - 1) last.to = place;
+    else runs.push({ from: place, to: place });
+  }
+  return runs;
+}
+
 /** Numbers are odds in per cent that the option at the left is the cheaper; heavy squares hold what cannot be separated. */
 export function oddsMatrix(input: OddsMatrixInput): Piece {
   const { options, standing } = input;
@@ -105,17 +116,21 @@ export function oddsMatrix(input: OddsMatrixInput): Piece {
       .map((group) => group.flatMap((number) => at.get(number) ?? []))
       .filter((places) => places.length > 1)
       .map((places) => {
-        const from = Math.min(...places);
-        const size = (Math.max(...places) - from + 1) * side;
-        return el('rect', {
-          x: left + from * side,
-          y: top + from * side,
-          width: size,
-          height: size,
-          fill: 'none',
-          stroke: colours.ink,
-          'stroke-width': pens.thick,
-        });
+        // Options that a rule puts out may stand between them: those are not framed.
+        const blocks = inRow(places);
+        return blocks.flatMap((across) =>
+          blocks.map((down) =>
+            el('rect', {
+              x: left + across.from * side,
+              y: top + down.from * side,
+              width: (across.to - across.from + 1) * side,
+              height: (down.to - down.from + 1) * side,
+              fill: 'none',
+              stroke: colours.ink,
+              'stroke-width': pens.thick,
+            }),
+          ),
+        );
       }),
   ]);
 }

@@ -43,6 +43,14 @@ it('stand(options) never lets an option lead that a rule puts out, and says so',
   expect(stand([], books, budget)).toMatchObject({ leader: null, groups: [], odds: {}, within: {} });
 });
 
+it('stand(options) leaves an option that a rule puts out in no group, whatever it costs', () => {
+  const between = option(5, [0.5, 2.2, 3.2, 4.2, 5.2], 'out');
+  const standing = stand([one, two, between], books, budget);
+  expect(standing.groups).toEqual([[1, 2]]);
+  expect(standing.odds[5]![1]).toBeGreaterThan(0);
+  expect(standing.within[5]).toBe(0.4);
+});
+
 it('stand(options) explains the leader with two figures and odds in steps of 5 %', () => {
   const big = [one, two].map((o) => ({
     ...o,
