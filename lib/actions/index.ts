@@ -9,6 +9,7 @@ export { crossValue, type CrossLine } from './crossLine.ts';
 export { rigidCrossbeam, trafficOnGirder, type GirderOptions } from './trafficOnGirder.ts';
 export { trafficTorsion, type TrafficTorsion } from './trafficTorsion.ts';
 export { trafficEnvelope, type EnvelopeOptions, type TrafficEnvelope } from './trafficEnvelope.ts';
+export { plainQuest, trafficOnLine } from './trafficOnLine.ts';
 export { trafficOnInfluence } from './trafficOnInfluence.ts';
 export {
   concrete,

@@ -1,6 +1,7 @@
 import type { At, Descriptor } from '../model/index.ts';
 import { centralAngle, chordOffset } from './curveFacts.ts';
 import { asIs, fact, factOf } from './factFigure.ts';
+import { bentUse, mostBent } from './supportFacts.ts';
 
 /** Odds of the grounds on which a foundation does not stand, and their overloads. */
 const overloads = (at: At): { readonly odds: string[]; readonly overloads: string[] } => {
@@ -17,6 +18,14 @@ const overloads = (at: At): { readonly odds: string[]; readonly overloads: strin
 
 const ofSupports = (at: At, field: string): string[] =>
   at.option.supports.map((_, s) => `${at.root}/supports/${s}/${field}`);
+
+/** A figure of the shaft in one with the deck that is bent most; nothing where there is none. */
+const ofMostBent =
+  (field: string) =>
+  (at: At): { readonly worst: string[] } => {
+    const worst = mostBent(at.option.supports);
+    return { worst: worst === null ? [] : [`${at.root}/supports/${worst}/${field}`] };
+  };
 
 /** A fact of the longest span on the curve of the road; not known where the radius is not. */
 const curved = (
@@ -97,6 +106,31 @@ export const supportFactFigures: readonly Descriptor[] = [
   fact('integralAbutments', factOf('integralAbutments').meaning, (at) => ({
     bearings: ofSupports(at, 'articulation/bearings'),
   })),
+  fact(
+    'castInPiers',
+    factOf('castInPiers').meaning,
+    (at) => ({
+      shafts: at.option.supports.flatMap(({ articulation: { frame } }, s) =>
+        frame === undefined ? [] : [`${at.root}/supports/${s}/articulation/frame/designKNm`],
+      ),
+    }),
+    ({ shafts }) => shafts.length,
+  ),
+  fact(
+    'castInUse',
+    'design moment / what carries it, of the shaft that is worst off; once none is in one with the deck, 0',
+    (at) => ({
+      ...ofMostBent('articulation/frame/designKNm')(at),
+      carries: ofMostBent('articulation/frame/carriesKNm')(at).worst,
+    }),
+    ({ worst: [designKNm = 0], carries: [carriesKNm = 1] }) => bentUse({ designKNm, carriesKNm }),
+  ),
+  ...(
+    [
+      ['castInPushMm', 'articulation/frame/pushMm'],
+      ['castInHeightM', 'heightM'],
+    ] as const
+  ).map(([id, field]) => fact(id, factOf(id).meaning, ofMostBent(field), ({ worst: [value = 0] }) => value)),
   ...curved('chordOffsetM', 'longest span^2 / (8 R)', chordOffset),
   ...curved('centralAngleDeg', 'longest span / R x 180 / pi', centralAngle),
 ];

@@ -31,6 +31,7 @@ const flagNames = [
   'light',
   'light-middles',
   'ballast',
+  'cast-in',
 ];
 /** The least and the most that can be asked for as a depth, m. */
 const FLATTEST_M = 0.01;
@@ -83,6 +84,7 @@ const formFlags = {
   strengthMPa: ['strength'],
   light: ['light', 'light-middles'],
   ballastKNm: ['ballast'],
+  castInPiers: ['cast-in'],
 } as const;
 type AskedHere = keyof typeof formFlags;
 type ChosenHere = Exclude<AskedHere, 'girders' | 'haunch'>;
@@ -110,7 +112,7 @@ function foreignFlags(flags: Flags, form: FormId): Problem[] {
   });
 }
 
-/** What is asked of a concrete box besides the usual: its width, strength, lightweight concrete, ballast. */
+/** What is asked of a concrete box besides the usual: its width, strength, lightweight concrete, ballast, piers in one with it. */
 function choicesOf(flags: Flags, problems: Problem[]): Pick<UnitTask, ChosenHere> {
   if (flags.values['light-middles'] !== undefined) needFlags(flags, ['light'], problems);
   const positive = (name: string, unit: string): number | undefined =>
@@ -120,6 +122,7 @@ function choicesOf(flags: Flags, problems: Problem[]): Pick<UnitTask, ChosenHere
   const densityKgM3 = positive('light', 'kg/m3');
   const middleM = numbersFlag(flags, 'light-middles', problems);
   const ballastKNm = numbersFlag(flags, 'ballast', problems);
+  const castInPiers = numberFlag(flags, 'cast-in', { above: 0, whole: true, unit: 'piers' }, problems);
   return {
     ...(boxWidthM === undefined ? {} : { boxWidthM }),
     ...(strengthMPa === undefined ? {} : { strengthMPa }),
@@ -127,6 +130,7 @@ function choicesOf(flags: Flags, problems: Problem[]): Pick<UnitTask, ChosenHere
       ? {}
       : { light: { densityKgM3, ...(middleM === undefined ? {} : { middleM }) } }),
     ...(ballastKNm === undefined ? {} : { ballastKNm }),
+    ...(castInPiers === undefined ? {} : { castInPiers }),
   };
 }
 
@@ -315,7 +319,8 @@ function designOf(asked: Asked): Design {
  * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
  * Without a depth the one of least cost in the published band is taken. Concrete boxes read `--box-width`
  * (between the axes of the outer webs, m), `--strength` (MPa), `--light` (oven-dry density, kg/m3; with `--light-middles`
- * only a length about the middle of each span, m), and `--ballast` (kN/m by span).
+ * only a length about the middle of each span, m), and `--ballast` (kN/m by span); cantilevered ones `--cast-in` (piers in
+ * the middle that the deck is cast in with).
  */
 export function sizeCommand(argv: readonly string[]): Said {
   const asked = readTask(argv);

@@ -35,6 +35,7 @@ import { articulationFigures } from '../substructure/articulationFigures.ts';
 import { footLineFigures } from '../substructure/footLineFigures.ts';
 import { foundationFigures } from '../substructure/foundationFigures.ts';
 import { integralFigures } from '../substructure/integralFigures.ts';
+import { frameFigures } from '../substructure/frameFigures.ts';
 import { shaftFigures } from '../substructure/shaftFigures.ts';
 import { supportFigures } from '../substructure/supportFigures.ts';
 import { wallLineFigures } from '../substructure/wallLineFigures.ts';
@@ -73,6 +74,8 @@ export const manual: readonly Descriptor[] = [
   ...riverFigures,
   // A wall in one with the deck before abutments.
   ...integralFigures,
+  // A shaft in one with the deck before other piers.
+  ...frameFigures,
   ...supportFigures,
   ...articulationFigures,
   ...alongFigures,

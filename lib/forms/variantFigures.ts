@@ -14,6 +14,7 @@ const asGiven = [
   ['light/densityKgM3', 'oven-dry density of the lightweight concrete', 'kg/m3'],
   ['light/middleM/:s', 'length of lightweight concrete about the middle of span *', 'm'],
   ['ballastKNm/:s', 'ballast of span *', 'kN/m'],
+  ['castInPiers', 'piers that the deck is asked to be cast in with', 'no'],
 ] as const;
 
 /** Steps of such a figure at a place, `light/middleM/1`. */

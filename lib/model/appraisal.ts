@@ -53,6 +53,8 @@ export interface Articulation {
   /** Moment along the road that it takes while the deck is cantilevered from it, kNm; absent where none is. */
   readonly buildingKNm?: number;
   readonly acrossKN: number;
+  /** Of a pier that the deck is cast in with; absent elsewhere. */
+  readonly frame?: ShaftInFrame;
   /** Movement of the expansion joint here, mm; 0 where the deck is continuous. */
   readonly jointMovementMm: number;
   /** Design uplift taken by a tie-down, kN; 0 where there is none. */
@@ -61,6 +63,20 @@ export interface Articulation {
   readonly bearingKind?: 'elastomeric' | 'pot';
   /** Force of a vessel against the support, kN; absent where none can reach it. */
   readonly vesselKN?: number;
+}
+
+/** A shaft in one with the deck as the deck bends it along the road. Moments in kNm, characteristic unless said. */
+export interface ShaftInFrame {
+  /** Bending stiffness that cracks and creep leave it, kNm2. */
+  readonly eiKNm2: number;
+  /** How far the deck moves over it from where it was cast, mm, and the moment at its foot from that. */
+  readonly pushMm: number;
+  readonly pushedKNm: number;
+  /** Moment at its top from what is laid on the deck and from traffic. */
+  readonly turnedKNm: number;
+  /** Design moment along the road at the end that is worst off, and what it carries there. */
+  readonly designKNm: number;
+  readonly carriesKNm: number;
 }
 
 export interface PierShaft {

@@ -34,6 +34,8 @@ export interface UnitTask {
   readonly light?: LightConcreteAsked;
   /** Concrete boxes: ballast in the cells by span, kN per m of deck, laid on the joined deck; none when absent. */
   readonly ballastKNm?: readonly number[];
+  /** Cantilevered boxes: neighbouring piers in the middle that the deck is cast in with; on bearings everywhere when absent. */
+  readonly castInPiers?: number;
   /** Thickness of an orthotropic deck plate, m, where it is given; by wheels and surfacing when absent. */
   readonly deckPlateM?: number;
   /** Cable-stayed: which supports (0-based) carry pylons. */
@@ -153,6 +155,17 @@ export interface WallQuake {
   readonly acrossAboveM: number;
 }
 
+/** A pier in one with the deck, without bearings, as the deck meets it. */
+export interface CastInPier {
+  /** Which support of the unit, 0-based. */
+  readonly support: number;
+  /** Couple that turns the deck over it, kNm per radian, its other supports letting it turn. */
+  readonly deckTurnKNm: number;
+  /** Couple that keeps the deck from turning over it, kNm, either way: under what is laid on it, and the most under traffic. */
+  readonly laidKNm: number;
+  readonly trafficKNm: number;
+}
+
 /** A sized unit. */
 export interface Design {
   readonly task: UnitTask;
@@ -164,6 +177,8 @@ export interface Design {
   readonly reactions: readonly SupportReaction[];
   /** Walls in one with the deck; absent where it rests on bearings. */
   readonly walls?: readonly IntegralWall[];
+  /** Piers in one with the deck; absent where it rests on bearings. */
+  readonly castIn?: readonly CastInPier[];
   readonly checks: readonly Check[];
   /** The check with the highest utilisation. */
   readonly limitingCheck: Check;

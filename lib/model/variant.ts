@@ -26,18 +26,23 @@ export interface Variant {
   readonly light?: LightConcreteAsked;
   /** Ballast in the cells of a box by span, kN per m of deck. */
   readonly ballastKNm?: readonly number[];
+  /** Neighbouring piers in the middle of the unit that its deck is cast in with, 1 or more; on bearings everywhere when absent. */
+  readonly castInPiers?: number;
 }
 
 /** Choices of a variant that the search makes itself where nobody has; the others are as the form finds best until they are asked for. */
 export const searchedChoices = ['haunchRatio', 'substringers', 'transverse', 'struts', 'ribs'] as const;
 type SearchedChoice = (typeof searchedChoices)[number];
 
-/** How the main unit of an option is asked to be made: absent = without, 'unknown' = whichever costs least. */
-export type AskedVariant = Omit<Variant, SearchedChoice> & {
+/** How the main unit of an option is asked to be made: absent = without, 'unknown' = whichever costs least, or what is usual. */
+export type AskedVariant = Omit<Variant, SearchedChoice | 'castInPiers'> & {
   readonly [Key in SearchedChoice]?: Variant[Key] | 'unknown';
+} & {
+  /** Unknown: on bearings, as is usual here. */
+  readonly castInPiers?: number | 'unknown';
 };
 
-/** What is said of how a unit is made: what is left to the search is left out. */
+/** What is said of how a unit is made: what is left to the search, or to what is usual, is left out. */
 export function saidOf(asked: AskedVariant): Variant {
   return Object.fromEntries(Object.entries(asked).filter(([, value]) => value !== 'unknown'));
 }

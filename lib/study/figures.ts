@@ -195,6 +195,7 @@ export const studyFigures: readonly Descriptor[] = [
       ['light/densityKgM3', 'oven-dry density of the lightweight concrete', 'kg/m3'],
       ['light/middleM/:s', 'length of lightweight concrete about the middle of span *', 'm'],
       ['ballastKNm/:s', 'ballast of span *', 'kN/m'],
+      ['castInPiers', 'piers that the deck is cast in with', 'no'],
     ] as const
   ).map(([steps, label, unit]) =>
     typed(

@@ -198,6 +198,7 @@ const variant = z.strictObject({
     .strictObject({ densityKgM3: z.number().positive().max(1e4), middleM: bySpan.exactOptional() })
     .exactOptional(),
   ballastKNm: bySpan.exactOptional(),
+  castInPiers: orUnknown(z.int().min(1).max(4998)).exactOptional(),
 });
 
 const options = z.strictObject({

@@ -1,6 +1,8 @@
+import type { CastInPier } from '../model/index.ts';
 import { substructureData } from './data.ts';
 import { deckMaterial } from './deckMaterial.ts';
 import { depthOver } from './depthOver.ts';
+import { pushOf, type FrameAsk } from './framedShaft.ts';
 import { forceAlong, heldAlong, holdingForce, type UnitOnGround } from './heldAlong.ts';
 import { jointMovement, windOnDeck } from './loads.ts';
 
@@ -12,6 +14,8 @@ export interface Hold {
   readonly movementMm: number;
   /** Permanent load of the whole unit where it is held here, kN; 0 where it slides. */
   readonly heldKN: number;
+  /** A pier that the deck is cast in with: what the deck does to it. */
+  readonly frame?: FrameAsk;
 }
 
 /**
@@ -33,19 +37,24 @@ export function articulate(on: UnitOnGround, alone = false): Hold[] {
     const own = held.stiffnessKNm[i]!;
     const movementMm = jointMovement(material, Math.abs(chainage - held.stillM));
     const isFixed = own > 0 && !held.afloat;
+    const castIn = design.castIn?.find(({ support }) => support === i);
     return {
       fixed: isFixed,
       alongKN:
         own > 0
-          ? holdingForce(force, own, all, movementMm)
+          ? // A shaft in one with the deck is pushed by what the deck moves when it is sized.
+            holdingForce(force, own, all, castIn ? 0 : movementMm)
           : substructureData.friction.coefficient * (permanent[i] ?? 0),
       acrossKN: windOnDeck(depthOver(design, i), tributary(x, i)),
       // A pier that holds the deck bends with it.
       movementMm: isFixed ? 0 : movementMm,
       heldKN: own > 0 ? (weight * own) / all : 0,
+      ...(castIn ? { frame: frameOf(castIn, pushOf(material, Math.abs(chainage - held.stillM))) } : {}),
     };
   });
 }
+
+const frameOf = ({ support: _at, ...pier }: CastInPier, pushM: number): FrameAsk => ({ ...pier, pushM });
 
 /** Half the span on either side, m. */
 function tributary(x: readonly number[], i: number): number {

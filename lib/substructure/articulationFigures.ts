@@ -66,7 +66,7 @@ export const articulationFigures: readonly Descriptor[] = [
     unit: '',
     method: 'limits of movement and skew',
     formula:
-      'one unit of a slab, girder or box form, pressed at its ends; movement from its middle and skew within their limits',
+      'one unit of a slab, girder or box form, on bearings over its piers and pressed at its ends; movement from its middle and skew within their limits',
     inputs: (at) => ({
       ends: [at.ends.start, at.ends.end],
       skew: 'site/skewDeg',
@@ -145,7 +145,10 @@ export const articulationFigures: readonly Descriptor[] = [
   }),
   described({
     path: support('articulation/bearingMN'),
-    label: on('design load of all bearings'),
+    label: (at) =>
+      at.support.articulation.frame
+        ? `design load of the deck, ${supportName(at)}`
+        : `design load of all bearings, ${supportName(at)}`,
     unit: 'MN',
     method: 'factored sum',
     formula: '(gamma G x permanent + gamma Q x traffic) / 1000',

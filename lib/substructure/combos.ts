@@ -1,3 +1,5 @@
+import type { EndMoments } from './framedShaft.ts';
+
 /**
  * One combination of characteristic loads at a support. Forces in kN; a horizontal force acts at its own level, m.
  * `along` is positive towards the span for an abutment and has no sign for a pier.
@@ -10,6 +12,8 @@ export interface Combo {
   readonly momentAlongKNm?: number;
   readonly acrossKN: number;
   readonly acrossLevelM: number;
+  /** Moments at the ends of a shaft in one with the deck that come of its movement: part of the others, with a factor of their own. */
+  readonly imposed?: Pick<EndMoments, 'topKNm' | 'footKNm'>;
   /** Factor on allowable ground and pile loads: 1, or more for accidental loads. */
   readonly capacity: number;
   /** Factor on the loads for the check of the shaft at the ultimate limit state. */

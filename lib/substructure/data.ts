@@ -24,7 +24,7 @@ const ground = z.strictObject({
 const schema = z.strictObject({
   about: z.string(),
   concrete: figures('fckMPa', 'fcdMPa', 'fydMPa', 'weightKNm3', 'modulusMPa', 'crackedShare'),
-  factors: figures('permanent', 'traffic', 'wind', 'windWithTraffic', 'favourable'),
+  factors: figures('permanent', 'traffic', 'wind', 'windWithTraffic', 'favourable', 'imposed'),
   braking: z.strictObject({
     lm1: figures('baseKN', 'perMKN', 'capKN'),
     hl93: figures('truckShare', 'trainShare', 'truckKN', 'laneKNm'),
@@ -78,6 +78,8 @@ const schema = z.strictObject({
     'leafBarsKgM3',
     'columnBarsKgM3',
     'hollowBarsKgM3',
+    'framedLeafBarsKgM3',
+    'framedHollowBarsKgM3',
     'verticalShare',
   ),
   pylon: figures('legLengthM', 'legsBeyondDeckM'),

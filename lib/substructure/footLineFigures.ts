@@ -30,6 +30,7 @@ function barsOf(at: At): string {
   if (what.endsWith('piles')) return 'data/substructure/piles/barsKgM3';
   if (!what.endsWith('shaft below ground')) return 'data/substructure/footing/barsKgM3';
   if (at.support.kind === 'abutment') return abutmentBarsPath(at);
+  if (at.support.articulation.frame) return 'data/substructure/pier/framedLeafBarsKgM3';
   return `data/substructure/pier/${at.support.shaft.columns === 2 ? 'columnBarsKgM3' : 'leafBarsKgM3'}`;
 }
 

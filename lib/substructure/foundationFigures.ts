@@ -34,6 +34,10 @@ const loads = (at: At) =>
     along: `${at.foot}/articulation/alongKN`,
     across: `${at.foot}/articulation/acrossKN`,
     height: `${at.foot}/heightM`,
+    framed:
+      at.support.articulation.frame === undefined
+        ? []
+        : (['pushedKNm', 'turnedKNm'] as const).map((field) => `${at.foot}/articulation/frame/${field}`),
     building:
       at.support.articulation.buildingKNm === undefined ? [] : [`${at.foot}/articulation/buildingKNm`],
     struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],

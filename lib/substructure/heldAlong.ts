@@ -1,4 +1,4 @@
-import type { Design, Site, Unit } from '../model/index.ts';
+import type { CastInPier, Design, Site, Unit } from '../model/index.ts';
 import { constructionDepth } from '../site/constructionDepth.ts';
 import { bearingKind, rubberHeight } from './bearingKind.ts';
 import { substructureData } from './data.ts';
@@ -6,7 +6,7 @@ import { deckMaterial } from './deckMaterial.ts';
 import { depthOver } from './depthOver.ts';
 import { fixedSupport } from './fixedSupport.ts';
 import { brakingForce, jointMovement, unbalancedFriction, type DeckMaterial } from './loads.ts';
-import { leafAt, pierStiffness } from './pierStiffness.ts';
+import { framedStiffness, leafAt, pierStiffness } from './pierStiffness.ts';
 import { seismicLoad } from './seismicLoad.ts';
 
 /** How a unit is held along the road. */
@@ -73,15 +73,16 @@ export function rubberStiffness(loadKN: number, movementMm: number): number {
 /** Two springs one above the other. */
 export const inSeries = (a: number, b: number): number => 1 / (1 / a + 1 / b);
 
-/** Height of each pier from its foundation to its bearings, m. */
-function pierHeights({ site, design, heightM }: UnitOnGround): number[] {
+/** Height of each pier from its foundation to its bearings, or to the deck that is cast in with it, m. */
+export function pierHeights({ site, design, heightM }: UnitOnGround): number[] {
   const { bearings, piles } = substructureData;
-  return heightM.map((height, i) =>
-    Math.max(
+  return heightM.map((height, i) => {
+    const bearingM = design.castIn?.some(({ support }) => support === i) ? 0 : bearings.heightM;
+    return Math.max(
       1,
-      height - constructionDepth(site.deck, depthOver(design, i)) - bearings.heightM + piles.capCoverM,
-    ),
-  );
+      height - constructionDepth(site.deck, depthOver(design, i)) - bearingM + piles.capCoverM,
+    );
+  });
 }
 
 /** Runs of neighbouring inner supports that contain one of them, two or more, at most so many. */
@@ -126,8 +127,19 @@ function afloat(on: UnitOnGround, piers: readonly number[], material: DeckMateri
   return isRubber && !isSheared ? { stiffnessKNm, stillM, afloat: true } : null;
 }
 
+/** Held by the piers that the deck is cast in with. */
+function byFrame(on: UnitOnGround, castIn: readonly CastInPier[]): HeldAlong {
+  const { unit, site } = on;
+  const heights = pierHeights(on);
+  const stiffnessKNm = unit.supportsM.map((_, i) => {
+    const pier = castIn.find(({ support }) => support === i);
+    return pier ? framedStiffness(site.deck.widthM, heights[i]!, pier.deckTurnKNm) : 0;
+  });
+  return { stiffnessKNm, stillM: stillAt(unit.supportsM, stiffnessKNm), afloat: false };
+}
+
 /**
- * How a unit is held along the road. One support near its middle holds it alone, unless two or more neighbouring piers with
+ * How a unit is held along the road. Piers that the deck is cast in with hold it. Elsewhere one support near its middle holds it alone, unless two or more neighbouring piers with
  * that one among them, or laminated rubber on all its supports, leave smaller moments at the feet of its piers, the worst of
  * them counted twice: braking and friction are then shared by stiffness, 3 E I / h^3 of a pier with the rubber on it in
  * series, and each pier is bent by what the deck moves over it. Foundations are taken as rigid: on the safe side for what
@@ -136,6 +148,7 @@ function afloat(on: UnitOnGround, piers: readonly number[], material: DeckMateri
  */
 export function heldAlong(on: UnitOnGround, alone = false): HeldAlong {
   const { site, unit, design, heightM, waterDepthM } = on;
+  if (design.castIn) return byFrame(on, design.castIn);
   const x = unit.supportsM;
   const held = fixedSupport(x, heightM, waterDepthM);
   const single: HeldAlong = {

@@ -22,6 +22,8 @@ export function integralEnds(site: Site, units: readonly Unit[], designs: readon
   const { mostMovementMm, mostSkewDeg } = substructureData.integral;
   const design = designs[0]!;
   if (units.length !== 1 || site.skewDeg === null || design.task.pylons !== undefined) return false;
+  // The point that stays is then among its piers, not in its middle.
+  if (design.castIn) return false;
   // A frame brings walls of its own.
   if (design.walls !== undefined && design.walls.length > 0) return false;
   if (!castIn.has(familyOf[design.task.form])) return false;

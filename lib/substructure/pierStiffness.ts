@@ -1,7 +1,8 @@
 import type { Site } from '../model/index.ts';
 import { substructureData } from './data.ts';
+import { swayOf } from './framedShaft.ts';
 import { settingAt } from './setting.ts';
-import { gyration } from './sizeShaft.ts';
+import { gyration, shaftInertia, shaftWidth } from './sizeShaft.ts';
 
 /** Whether a pier at a chainage is a leaf because water reaches it or traffic may strike it. */
 export function leafAt(site: Site, chainageM: number): boolean {
@@ -9,20 +10,41 @@ export function leafAt(site: Site, chainageM: number): boolean {
   return floodDepthM > 0 || impact !== null;
 }
 
-/**
- * Stiffness of a pier against its top moving along the road, kN per m: 3 E I / h^3 of a cantilever from a rigid foundation,
- * height in metres. Its shaft is as thick as its slenderness alone asks for, in the steps in which shafts are sized; cracks
- * and creep leave it a share of its stiffness.
- */
-export function pierStiffness(deckWidthM: number, heightM: number, isLeaf: boolean): number {
-  const { pier, concrete } = substructureData;
+/** Thickness along the road, m, and inertia about the axis across it, m4, of a shaft. */
+interface SlenderShaft {
+  readonly lengthM: number;
+  readonly inertiaM4: number;
+}
+
+/** A shaft as thick as its slenderness alone asks for, in the steps in which shafts are sized. */
+function slenderShaft(deckWidthM: number, heightM: number, isLeaf: boolean): SlenderShaft {
+  const { pier } = substructureData;
   const isHollow = heightM > pier.hollowAboveM;
   const isOne = isLeaf || isHollow;
-  const widthM = Math.max(pier.leastLeafWidthM, pier.leafWidthShare * deckWidthM);
   const slender = (pier.effectiveLength * heightM) / (gyration(isHollow) * pier.slenderness);
   const steps = Math.ceil(slender / pier.stepM - 1e-9);
-  const t = Math.max(isOne ? pier.leastLeafM : pier.leastColumnM, steps * pier.stepM);
-  const inner = isHollow ? [Math.max(0, widthM - 2 * pier.wallM), Math.max(0, t - 2 * pier.wallM)] : [0, 0];
-  const inertiaM4 = isOne ? (widthM * t ** 3 - inner[0]! * inner[1]! ** 3) / 12 : (2 * t ** 4) / 12;
-  return (3 * concrete.modulusMPa * 1000 * concrete.crackedShare * inertiaM4) / heightM ** 3;
+  const lengthM = Math.max(isOne ? pier.leastLeafM : pier.leastColumnM, steps * pier.stepM);
+  return {
+    lengthM,
+    inertiaM4: isOne ? shaftInertia(lengthM, shaftWidth(deckWidthM), isHollow) : (2 * lengthM ** 4) / 12,
+  };
+}
+
+/** Bending stiffness that cracks and creep leave a shaft, kNm2 (EN 1992-1-1 5.4(3), see the data file). */
+export const crackedEI = (inertiaM4: number): number =>
+  substructureData.concrete.modulusMPa * 1000 * substructureData.concrete.crackedShare * inertiaM4;
+
+/**
+ * Stiffness of a pier against its top moving along the road, kN per m: 3 E I / h^3 of a cantilever from a rigid foundation,
+ * height in metres. Its shaft is as thick as its slenderness alone asks for; cracks and creep leave it a share of its
+ * stiffness.
+ */
+export function pierStiffness(deckWidthM: number, heightM: number, isLeaf: boolean): number {
+  return (3 * crackedEI(slenderShaft(deckWidthM, heightM, isLeaf).inertiaM4)) / heightM ** 3;
+}
+
+/** The same of a leaf that the deck is cast in with, kN per m: up to 12 E I / h^3. */
+export function framedStiffness(deckWidthM: number, heightM: number, deckTurnKNm: number): number {
+  const eiKNm2 = crackedEI(slenderShaft(deckWidthM, heightM, true).inertiaM4);
+  return swayOf({ heightM, eiKNm2, deckTurnKNm });
 }

@@ -11,8 +11,10 @@ export interface ShaftTask {
   readonly deckWidthM: number;
   /** True where it stands in water or may be struck: one wall instead of two columns. */
   readonly leaf: boolean;
-  /** Loads at bearing level; the shaft's own weight is added here. */
-  readonly combos: readonly Combo[];
+  /** The deck is cast in with it: one wall, bars for its bending at both ends. */
+  readonly framed?: true;
+  /** Loads at bearing level, of a framed shaft by its thickness, m; the shaft's own weight is added here. */
+  readonly combos: readonly Combo[] | ((lengthM: number) => readonly Combo[]);
   /** Largest design vertical load, kN. */
   readonly designVerticalKN: number;
   /** Permanent vertical load, kN: the axial force that helps in bending. */
@@ -25,22 +27,31 @@ const thickest = 8;
  * Sizes a pier shaft by axial stress, slenderness and bending at its foot: the thinnest in steps that passes all three.
  * One leaf where struck or in water, two columns with a head elsewhere, a hollow shaft above 30 m. Bars by published ratios.
  * Returns dimensions along (length) and across (width) the road, m, concrete in m3 and bars in kg.
- * A shaft that would be thicker than 8 m is returned at 8 m: its height is far outside the tool's range.
+ * A shaft that would be thicker than 8 m is returned at 8 m: its height is far outside the tool's range. One that the deck
+ * is cast in with draws the more from what moves the thicker it is: where none passes, the one that is bent least beyond
+ * what it carries is returned.
  */
 export function sizeShaft(task: ShaftTask): PierShaft {
-  const pier = substructureData.pier;
+  const { pier } = substructureData;
   const hollow = task.heightM > pier.hollowAboveM;
-  const leaf = task.leaf || hollow;
-  const widthM = Math.max(pier.leastLeafWidthM, pier.leafWidthShare * task.deckWidthM);
-  let t = leaf ? pier.leastLeafM : pier.leastColumnM;
-  while (t < thickest && !passes(task, t, leaf ? widthM : t, leaf ? 1 : 2, hollow))
-    t = round1(t + pier.stepM);
+  const leaf = task.leaf || task.framed === true || hollow;
   const columns = leaf ? 1 : 2;
+  const widthM = shaftWidth(task.deckWidthM);
+  const sectionOf = (lengthM: number): Section => ({
+    lengthM,
+    widthM: leaf ? widthM : lengthM,
+    columns,
+    hollow,
+  });
+  const first = leaf ? pier.leastLeafM : pier.leastColumnM;
+  let t = first;
+  while (t < thickest && !passes(task, sectionOf(t))) t = round1(t + pier.stepM);
+  if (task.framed && !passes(task, sectionOf(t))) t = leastBent(task, sectionOf, first);
   const head = leaf ? 0 : pier.headDepthM * t * widthM;
   const heightM = leaf ? task.heightM : Math.max(0, task.heightM - pier.headDepthM);
   const area = sectionArea(t, leaf ? widthM : t, hollow) * columns;
   const concreteM3 = area * heightM + head;
-  const ratio = hollow ? pier.hollowBarsKgM3 : leaf ? pier.leafBarsKgM3 : pier.columnBarsKgM3;
+  const ratio = barsKgM3(task, columns, hollow);
   const headRatio = substructureData.footing.barsKgM3;
   return {
     lengthM: t,
@@ -61,28 +72,108 @@ export function sectionArea(lengthM: number, widthM: number, hollow: boolean): n
   return lengthM * widthM - Math.max(0, lengthM - wall) * Math.max(0, widthM - wall);
 }
 
-function passes(task: ShaftTask, t: number, width: number, columns: number, hollow: boolean): boolean {
+/** Width of a leaf under a deck, m. */
+export const shaftWidth = (deckWidthM: number): number =>
+  Math.max(substructureData.pier.leastLeafWidthM, substructureData.pier.leafWidthShare * deckWidthM);
+
+/** Inertia of a leaf about the axis across the road, m4. */
+export function shaftInertia(lengthM: number, widthM: number, hollow: boolean): number {
+  const wall = 2 * substructureData.pier.wallM;
+  const inner = hollow ? Math.max(0, widthM - wall) * Math.max(0, lengthM - wall) ** 3 : 0;
+  return (widthM * lengthM ** 3 - inner) / 12;
+}
+
+/** Bars per m3 of a shaft. */
+function barsKgM3({ framed }: Pick<ShaftTask, 'framed'>, columns: number, hollow: boolean): number {
+  const { pier } = substructureData;
+  if (framed) return hollow ? pier.framedHollowBarsKgM3 : pier.framedLeafBarsKgM3;
+  if (hollow) return pier.hollowBarsKgM3;
+  return columns === 1 ? pier.leafBarsKgM3 : pier.columnBarsKgM3;
+}
+
+/** One shaft or column of a pier, m. */
+interface Section {
+  readonly lengthM: number;
+  readonly widthM: number;
+  readonly columns: number;
+  readonly hollow: boolean;
+}
+
+/** Design moment along the road and what carries it, of one shaft or column, kNm. */
+export interface AlongUse {
+  readonly designKNm: number;
+  readonly carriesKNm: number;
+}
+
+const useOf = ({ designKNm, carriesKNm }: AlongUse): number => designKNm / carriesKNm;
+
+/** Among the thicknesses that carry the weight, the one that is bent least beyond what it carries, m. */
+function leastBent(task: ShaftTask, sectionOf: (lengthM: number) => Section, first: number): number {
+  const { stepM } = substructureData.pier;
+  let best = thickest;
+  let least = Infinity;
+  for (let t = first; t <= thickest; t = round1(t + stepM)) {
+    const section = sectionOf(t);
+    if (!carriesWeight(task, section)) continue;
+    const use = useOf(alongUse(task, section));
+    if (use < least) [best, least] = [t, use];
+  }
+  return best;
+}
+
+function carriesWeight(task: ShaftTask, { lengthM: t, widthM, columns, hollow }: Section): boolean {
   const { pier, concrete, factors } = substructureData;
-  const area = sectionArea(t, width, hollow);
-  const fcdKPa = concrete.fcdMPa * 1000;
+  const area = sectionArea(t, widthM, hollow);
   const ownKN = area * columns * task.heightM * concrete.weightKNm3;
-  const axial = (task.designVerticalKN + factors.permanent * ownKN) / (area * columns * fcdKPa);
+  const axial =
+    (task.designVerticalKN + factors.permanent * ownKN) / (area * columns * concrete.fcdMPa * 1000);
   if (axial > pier.axialShare) return false;
-  if ((pier.effectiveLength * task.heightM) / (gyration(hollow) * t) > pier.slenderness) return false;
-  const ratio = hollow ? pier.hollowBarsKgM3 : columns === 1 ? pier.leafBarsKgM3 : pier.columnBarsKgM3;
-  const steelM2 = (area * ratio * pier.verticalShare) / steelKgM3;
-  const normalKN = Math.max(0, task.permanentKN + ownKN) / columns;
-  const along = bendingCapacity(area, t, steelM2, normalKN);
-  const across = bendingCapacity(area, width, steelM2, normalKN);
-  return task.combos.every((combo) => {
-    const foot = resultantAt(combo, task.footLevelM);
-    // Two columns joined by a head work as a frame across the road: each bends half the storey height.
-    const acrossShare = columns === 2 ? 1 / 4 : 1;
-    return (
-      (combo.ultimate * foot.momentAlongKNm) / columns <= along &&
-      combo.ultimate * foot.momentAcrossKNm * acrossShare <= across
-    );
-  });
+  return (pier.effectiveLength * task.heightM) / (gyration(hollow) * t) <= pier.slenderness;
+}
+
+/** Bending capacity of one shaft or column of a depth, m, kNm; at its foot its own weight helps. */
+function capacityOf(task: ShaftTask, section: Section, depthM: number, where: 'foot' | 'top'): number {
+  const { pier, concrete } = substructureData;
+  const { lengthM, widthM, columns, hollow } = section;
+  const area = sectionArea(lengthM, widthM, hollow);
+  const ownKN = where === 'foot' ? area * columns * task.heightM * concrete.weightKNm3 : 0;
+  const steelM2 = (area * barsKgM3(task, columns, hollow) * pier.verticalShare) / steelKgM3;
+  return bendingCapacity(area, depthM, steelM2, Math.max(0, task.permanentKN + ownKN) / columns);
+}
+
+const combosOf = ({ combos }: ShaftTask, { lengthM }: Section): readonly Combo[] =>
+  typeof combos === 'function' ? combos(lengthM) : combos;
+
+/** The bending along the road that comes nearest to what carries it: at the foot, of a framed shaft at its top as well. */
+export function alongUse(task: ShaftTask, section: Section): AlongUse {
+  const { imposed: factor } = substructureData.factors;
+  const foot = capacityOf(task, section, section.lengthM, 'foot');
+  const top = task.framed ? capacityOf(task, section, section.lengthM, 'top') : 0;
+  let worst: AlongUse = { designKNm: 0, carriesKNm: foot };
+  for (const combo of combosOf(task, section)) {
+    const { ultimate, imposed, momentAlongKNm = 0 } = combo;
+    /** A moment at the ultimate limit state, of which the deck's movement has a factor of its own. */
+    const design = (all: number, moved = 0): number => ultimate * all - (ultimate - factor) * moved;
+    const atFoot = design(resultantAt(combo, task.footLevelM).momentAlongKNm, imposed?.footKNm);
+    const ends: AlongUse[] = [{ designKNm: atFoot / section.columns, carriesKNm: foot }];
+    if (imposed) ends.push({ designKNm: design(-momentAlongKNm, imposed.topKNm), carriesKNm: top });
+    for (const end of ends) if (useOf(end) > useOf(worst)) worst = end;
+  }
+  return worst;
+}
+
+function passes(task: ShaftTask, section: Section): boolean {
+  if (!carriesWeight(task, section)) return false;
+  const { designKNm, carriesKNm } = alongUse(task, section);
+  const across = capacityOf(task, section, section.widthM, 'foot');
+  // Two columns joined by a head work as a frame across the road: each bends half the storey height.
+  const acrossShare = section.columns === 2 ? 1 / 4 : 1;
+  return (
+    designKNm <= carriesKNm &&
+    combosOf(task, section).every(
+      (combo) => combo.ultimate * resultantAt(combo, task.footLevelM).momentAcrossKNm * acrossShare <= across,
+    )
+  );
 }
 
 /**

@@ -5,7 +5,10 @@ import { foundationFor } from './foundationFor.ts';
 import { groundUnder } from './groundUnder.ts';
 import { pierCombos } from './pierCombos.ts';
 import { scourDepth, settingAt } from './setting.ts';
-import { sectionArea, sizeShaft } from './sizeShaft.ts';
+import { framedReport } from './framedReport.ts';
+import type { FramedShaft } from './framedShaft.ts';
+import { crackedEI } from './pierStiffness.ts';
+import { alongUse, sectionArea, shaftInertia, shaftWidth, sizeShaft, type ShaftTask } from './sizeShaft.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import {
   articulationLines,
@@ -20,7 +23,8 @@ import {
 export function standPier(site: Site, ask: SupportAsk): Support {
   const { pier, bearings, concrete, piles, wind } = substructureData;
   const setting = settingAt(site, ask.chainageM);
-  const topLevelM = ask.soffitLevelM - bearings.heightM;
+  const { frame } = ask;
+  const topLevelM = ask.soffitLevelM - (frame ? 0 : bearings.heightM);
   const shaftFootM = setting.groundLevelM - piles.capCoverM;
   const heightM = Math.max(0, topLevelM - setting.groundLevelM);
   const shaftHeightM = Math.max(0, topLevelM - shaftFootM);
@@ -29,28 +33,46 @@ export function standPier(site: Site, ask: SupportAsk): Support {
   const wet = setting.floodDepthM > 0 || setting.impact !== null;
   const designMN = bearingLoadMN(ask);
   const pylon = ask.pylon;
+  const hollow = shaftHeightM > pier.hollowAboveM;
+  const framedBy = (lengthM: number): FramedShaft | null =>
+    frame
+      ? {
+          heightM: shaftHeightM,
+          eiKNm2: crackedEI(shaftInertia(lengthM, shaftWidth(site.deck.widthM), hollow)),
+          deckTurnKNm: frame.deckTurnKNm,
+        }
+      : null;
+  const bare = { weightKN: 0, windKN, windLevelM: setting.groundLevelM + heightM / 2 };
+  const shaftTask: ShaftTask = {
+    heightM: shaftHeightM,
+    footLevelM: shaftFootM,
+    deckWidthM: site.deck.widthM,
+    leaf: wet,
+    ...(frame
+      ? {
+          framed: true,
+          combos: (lengthM) => pierCombos(ask, setting, topLevelM, bare, framedBy(lengthM)),
+        }
+      : { combos: pierCombos(ask, setting, topLevelM, bare) }),
+    designVerticalKN: designMN * 1000,
+    permanentKN: ask.permanentKN,
+  };
   const shaft = pylon
     ? { lengthM: pylon.lengthM, widthM: pylon.widthM, columns: 2, concreteM3: 0, reinforcementKg: 0 }
-    : sizeShaft({
-        heightM: shaftHeightM,
-        footLevelM: shaftFootM,
-        deckWidthM: site.deck.widthM,
-        leaf: wet,
-        combos: pierCombos(ask, setting, topLevelM, {
-          weightKN: 0,
-          windKN,
-          windLevelM: setting.groundLevelM + heightM / 2,
-        }),
-        designVerticalKN: designMN * 1000,
-        permanentKN: ask.permanentKN,
-      });
+    : sizeShaft(shaftTask);
   const weightKN = pylon ? pylon.weightKN : shaft.concreteM3 * concrete.weightKNm3;
-  const combos = pierCombos(ask, setting, topLevelM, {
-    weightKN,
-    windKN: pylon ? wind.pressureKNm2 * pylon.lengthM * 2 * pylon.heightM : windKN,
-    windLevelM: setting.groundLevelM + (pylon ? pylon.heightM : heightM) / 2,
-  });
-  const hollow = shaftHeightM > pier.hollowAboveM;
+  const framed = framedBy(shaft.lengthM);
+  const combos = pierCombos(
+    ask,
+    setting,
+    topLevelM,
+    {
+      weightKN,
+      windKN: pylon ? wind.pressureKNm2 * pylon.lengthM * 2 * pylon.heightM : windKN,
+      windLevelM: setting.groundLevelM + (pylon ? pylon.heightM : heightM) / 2,
+    },
+    framed,
+  );
   const columnWidth = shaft.columns === 2 ? shaft.lengthM : shaft.widthM;
   const task: FoundationTask = {
     name: ask.name,
@@ -66,7 +88,11 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     shaftAreaM2: pylon
       ? 2 * shaft.lengthM * shaft.lengthM
       : sectionArea(shaft.lengthM, columnWidth, hollow) * shaft.columns,
-    shaftBarsKgM3: shaft.columns === 2 ? pier.columnBarsKgM3 : pier.leafBarsKgM3,
+    shaftBarsKgM3: frame
+      ? pier.framedLeafBarsKgM3
+      : shaft.columns === 2
+        ? pier.columnBarsKgM3
+        : pier.leafBarsKgM3,
     shaftItem: pylon ? 'pylon-concrete' : 'pier-concrete',
   };
   const ground = groundUnder(site, ask.chainageM);
@@ -85,7 +111,12 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     permanentKN: ask.permanentKN,
     trafficKN: ask.trafficKN,
     shaft,
-    articulation: articulationOf(ask, ask.acrossKN, setting.vesselKN),
+    articulation: {
+      ...articulationOf(ask, ask.acrossKN, setting.vesselKN),
+      ...(frame && framed
+        ? { frame: framedReport(frame, framed, alongUse(shaftTask, { ...shaft, hollow })) }
+        : {}),
+    },
     lines: [
       ...articulationLines(ask, site.deck),
       ...shaftLines(ask, shaft, 'piers', 'pier-concrete', how),

@@ -114,6 +114,7 @@ function askAt(
   const kind = end ? 'abutment' : carrier ? 'pylon' : upliftKN(loads) > 0 ? 'anchor-pier' : 'pier';
   const word = { abutment: 'abutment', pier: 'pier', pylon: 'pylon', 'anchor-pier': 'anchor pier' }[kind];
   const fixed = meetings.filter(({ hold }) => hold.fixed);
+  const frame = end ? undefined : meetings.find(({ hold }) => hold.frame)?.hold.frame;
   const building = end ? null : builtFrom(site, meetings, loads.permanentKN);
   return {
     name: end ? `${index === 0 ? 'start' : 'end'} ${word}` : `${word} ${index}`,
@@ -133,10 +134,11 @@ function askAt(
     fixed: integral !== undefined || fixed.length > 0,
     heldAlongKN: meetings.reduce((sum, { hold }) => sum + hold.heldKN, 0),
     bearingMovementMm: integral ? 0 : Math.max(...meetings.map(({ hold }) => hold.movementMm)),
-    bearings: integral ? 0 : meetings.length * substructureData.bearings.perLine,
+    bearings: integral || frame ? 0 : meetings.length * substructureData.bearings.perLine,
     jointMovementMm: joint ? meetings.reduce((sum, { hold }) => sum + hold.movementMm, 0) : 0,
     ...pylon,
     ...(building ? { building } : {}),
     ...(integral ? { integral } : {}),
+    ...(frame ? { frame } : {}),
   };
 }

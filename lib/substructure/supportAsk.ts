@@ -1,4 +1,5 @@
 import type { IntegralWall, Support } from '../model/index.ts';
+import type { FrameAsk } from './framedShaft.ts';
 
 /** What one support is asked to carry: nothing here knows the form. Loads characteristic, kN. */
 export interface SupportAsk {
@@ -27,6 +28,8 @@ export interface SupportAsk {
   readonly heldAlongKN: number;
   /** The deck is cast into this abutment: no bearings, no joint. */
   readonly castIn?: boolean;
+  /** Pier only: the deck is cast in with it, and bends it. */
+  readonly frame?: FrameAsk;
   readonly bearings: number;
   readonly jointMovementMm: number;
   /** Movement of the bearings, both ways together, mm; 0 where the deck is held. */

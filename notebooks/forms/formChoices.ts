@@ -24,6 +24,8 @@ interface FigureChoice extends FigureOf {
   readonly kind: 'figure';
   /** The value that is the plain way, and the least. */
   readonly plain?: number;
+  /** The least, where there is no plain one. */
+  readonly least?: number;
   /** The most that a study file may say, where the form itself has nothing against it. */
   readonly most?: number;
   /** What it comes to in a unit of which it is not asked, and the figures of the design that it is told from. */
@@ -163,6 +165,21 @@ export const formChoices: Readonly<Record<keyof Variant, FormChoice>> = {
       },
     ],
     said: ({ ballastKNm = [] }) => (ballastKNm.some((kNm) => kNm > 0) ? 'ballast in its cells' : null),
+  },
+  castInPiers: {
+    fields: [
+      {
+        kind: 'figure',
+        label: 'piers in the middle that the deck is cast in with',
+        steps: ['castInPiers'],
+        places: 0,
+        step: 1,
+        least: 1,
+        from: 2,
+        empty: 'none, on bearings as usual',
+      },
+    ],
+    said: ({ castInPiers = 0 }) => `cast in with ${castInPiers === 1 ? 'one pier' : `${castInPiers} piers`}`,
   },
 };
 

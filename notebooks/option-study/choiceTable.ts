@@ -80,7 +80,7 @@ function fieldOf(fields: Fields, asked: Asked, field: ChoiceField, spans: readon
     ...(unit !== undefined && { unit }),
   };
   if (field.kind === 'figure') {
-    const { plain: least = 0, most } = field;
+    const { plain, least = plain ?? 0, most } = field;
     const limits = { min: { value: least }, ...(most !== undefined && { max: { value: most } }) };
     return fields.figure(figureMade(asked, field), { label, ...rules, ...limits });
   }

@@ -95,6 +95,12 @@ describe('size', () => {
     expect(lighter.quantities['prestressKg']).toBeLessThan(size(line).quantities['prestressKg']!);
   });
 
+  it('size(cantilever-box --cast-in) takes no less strand than on bearings', () => {
+    const line = '--form cantilever-box --spans 65,110,65 --width 12 --lanes 3 --depth 3';
+    const castIn = size(`${line} --cast-in 1`);
+    expect(castIn.quantities['prestressKg']).toBeGreaterThan(size(line).quantities['prestressKg']!);
+  });
+
   it.each([
     ['--light-middles 0,20,0', /light: expected .*--light/],
     ['--light 900 --light-middles 0,20,0', /light: expected 1400 to 2200 kg\/m3/],
@@ -102,6 +108,8 @@ describe('size', () => {
     ['--ballast 30,30', /ballast: expected a number for each of 3 spans/],
     ['--ballast 30,x,30', /ballast: expected a number for each span/],
     ['--strength 900', /strength: expected 20 to 90 MPa, received 900 MPa/],
+    ['--cast-in 3', /cast-in: expected 1 to 2, whole piers .*received 3/],
+    ['--cast-in 1.5', /cast-in: expected a whole number above 0/],
     ['--box-width 11.5', /box-width: expected 2.5 to 11.1 m, received 11.5 m/],
   ])('size(cantilever-box %s) is refused', (flags, said) => {
     const line = `--form cantilever-box --spans 65,110,65 --width 12 --lanes 3 --depth 3 ${flags}`;

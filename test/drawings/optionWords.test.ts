@@ -17,5 +17,7 @@ it('optionNote(option) says how a box is made where it is not the usual way', ()
   );
   expect(note({ ribs: true })).toContain(', slab on ribs');
   expect(note({ light: { densityKgM3: 1800 }, ballastKNm: [0] })).not.toMatch(/middles|ballast/u);
+  expect(note({ castInPiers: 2 })).toContain(', cast in with 2 piers');
+  expect(note({ castInPiers: 1 })).toContain(', cast in with one pier');
   expect(note({})).not.toMatch(/concrete|box/u);
 });

@@ -236,6 +236,7 @@ export const variants = (): Context =>
             light: { densityKgM3: 1900, middleM: [0, 60, 0] },
             ballastKNm: [20, 0, 30],
           }),
+          { ...kept(48, 'cantilever-box', { castInPiers: 2 }), depthM: 3 },
           // Arms longer than the end spans balance, held down by them and what is laid in them.
           kept(39, 'cantilever-box', { ballastKNm: [60, 0, 60] }, 0.22),
         ],

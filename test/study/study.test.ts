@@ -227,6 +227,21 @@ describe('readStudy', () => {
       'options.kept[0].variant.ballastKNm[1]',
     ],
     [
+      'a deck cast in with no pier',
+      (s) =>
+        (s['options']!['kept'] = set([
+          {
+            number: 1,
+            form: 'cantilever-box',
+            method: 'balanced-cantilever',
+            units: [{ form: 'cantilever-box', role: 'main', supportsM: [1240, 1300, 1400, 1470] }],
+            variant: { castInPiers: 0 },
+          },
+        ])),
+      'too-small',
+      'options.kept[0].variant.castInPiers',
+    ],
+    [
       'units that do not join',
       (s) =>
         (s['options']!['kept'] = set([

@@ -11,6 +11,7 @@ import type { BoxTraffic } from '../concrete-box/boxTraffic.ts';
 import type { Anchor } from './anchors.ts';
 import { armsOf, type Arm } from './arms.ts';
 import { cantileverData } from './cantileverData.ts';
+import type { HeldPier } from './heldPiers.ts';
 import { haunchShare, pierDepths, placeAt } from './haunch.ts';
 import type { OverSupports } from './parasitic.ts';
 import { stiffDeck } from './stiffDeck.ts';
@@ -54,6 +55,8 @@ export interface CantileverModel extends CantileverBase {
   /** What is laid on the joined deck: not the ballast that holds an arm down, which is there before. */
   readonly superimposed: Effects;
   readonly traffic: BoxTraffic;
+  /** Piers that the deck is cast in with. */
+  readonly heldPiers: readonly HeldPier[];
   /** Parasitic moment of 1 / depth as curvature that sags the deck, on stiffness 1, kNm per kNm2. */
   readonly warmKNm: Float64Array;
   readonly mostBottomM: number;
@@ -101,7 +104,7 @@ export function cantileverModel(
   const { task, arms, supportsM, layout } = base;
   const { mostM, mostOverDepth } = cantileverData.bottomSlab;
   const depthsM = pierDepths(arms, task.depthM, pierDepthM);
-  const { beam, stiffness, traffic, overSupports, anchors } = stiffDeck(
+  const { beam, stiffness, traffic, overSupports, anchors, heldPiers } = stiffDeck(
     base,
     pierDepthM / task.depthM,
     power,
@@ -130,8 +133,9 @@ export function cantileverModel(
     overSupports,
     anchors,
     towardsPiers: towardsPiers(arms, armAt, beam),
-    superimposed: uniform(beam, laidKNm(withoutHeld(task, anchors))),
+    superimposed: uniform(beam, laidWhenJoined(task, anchors)),
     traffic,
+    heldPiers,
     warmKNm: imposedCurvature(
       beam,
       depthM.map((depth) => 1 / depth),
@@ -145,10 +149,14 @@ export function holdsDown(anchors: readonly Anchor[], span: number): boolean {
   return anchors.some(({ firstSpan, lastSpan }) => span >= firstSpan && span <= lastSpan);
 }
 
-function withoutHeld(task: UnitTask, anchors: readonly Anchor[]): UnitTask {
+/** What is laid on the joined deck, kN/m, of all spans or of each: not the ballast that holds an arm down. */
+export function laidWhenJoined(task: UnitTask, anchors: readonly Anchor[]): number | number[] {
   const { ballastKNm } = task;
-  if (!ballastKNm || anchors.length === 0) return task;
-  return { ...task, ballastKNm: ballastKNm.map((kNm, span) => (holdsDown(anchors, span) ? 0 : kNm)) };
+  if (!ballastKNm || anchors.length === 0) return laidKNm(task);
+  return laidKNm({
+    ...task,
+    ballastKNm: ballastKNm.map((kNm, span) => (holdsDown(anchors, span) ? 0 : kNm)),
+  });
 }
 
 function towardsPiers(

@@ -1,11 +1,12 @@
-import type { SupportReaction } from '../../model/index.ts';
+import type { CastInPier, SupportReaction } from '../../model/index.ts';
 import { middleStation } from '../common/middleStation.ts';
 import { madeFigures } from '../concrete-box/boxConcrete.ts';
 import { underSlabFigures } from '../concrete-box/boxReport.ts';
 import { underSlabBarsKg } from '../concrete-box/underSlab.ts';
-import type { CantileverModel } from './cantileverModel.ts';
+import { laidWhenJoined, type CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
 import { worstHold } from './haunchedChecks.ts';
+import { heldKNm } from './heldPiers.ts';
 import { along, onFalseworkM, strandTotalKg, underSlabTotalM3, travellersOf } from './haunchedLines.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
@@ -23,6 +24,21 @@ export function haunchedReactions(model: CantileverModel, { weight }: SizedHaunc
     permanentKN: weight.reactionKN[j]! + model.superimposed.reactionKN[j]!,
     trafficMaxKN: Math.max(most.reactionMaxKN[j]!, end(j)),
     trafficMinKN: most.reactionMinKN[j]!,
+  }));
+}
+
+/**
+ * Piers that the deck is cast in with, as it meets them; none on bearings throughout. What creep turns after the arms are
+ * joined is left out: the weight of the arms and their tendons turn the deck opposite ways.
+ */
+export function haunchedCastIn(model: CantileverModel, { sections }: SizedHaunched): CastInPier[] {
+  const { heldPiers, concrete, task, anchors } = model;
+  const midspanKNm2 = concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4;
+  return heldPiers.map((pier) => ({
+    support: pier.support,
+    deckTurnKNm: midspanKNm2 * pier.turn1PerM,
+    laidKNm: Math.abs(heldKNm(pier, laidWhenJoined(task, anchors))),
+    trafficKNm: pier.trafficKNm,
   }));
 }
 

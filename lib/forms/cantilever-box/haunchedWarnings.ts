@@ -2,12 +2,20 @@ import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
+/** How piers hold the arms until they are joined: shafts that are cast in do so themselves. */
+function builtIn({ heldPiers, task }: CantileverModel): string {
+  if (heldPiers.length === 0) return 'built in or propped';
+  return heldPiers.length === task.spansM.length - 1
+    ? 'their shafts, cast in with the deck, take it'
+    : 'shafts that are cast in with the deck take it, the others are built in or propped';
+}
+
 /** What the engineer has to know of balance and of unequal arms. */
 export function haunchedWarnings(model: CantileverModel, { weight }: SizedHaunched): string[] {
   const warnings: string[] = [];
   if (model.arms.length > 0)
     warnings.push(
-      `Until its arms are joined a pier takes up to ${(weight.unbalancedKNm / 1e3).toFixed(0)} MNm with one arm a segment ahead: built in or propped.`,
+      `Until its arms are joined a pier takes up to ${(weight.unbalancedKNm / 1e3).toFixed(0)} MNm with one arm a segment ahead: ${builtIn(model)}.`,
     );
   const last = model.task.spansM.length - 1;
   for (const hold of weight.holds) {

@@ -1,16 +1,17 @@
-import type { Design, UnitTask } from '../../model/index.ts';
+import type { Design, Problem, UnitTask } from '../../model/index.ts';
 import { midspanDepthBand } from '../../rules/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { overLimit } from '../common/warnings.ts';
-import { boxFaults, checkBoxTask } from '../concrete-box/boxFaults.ts';
+import { boxFaults, refuse } from '../concrete-box/boxFaults.ts';
 import { boxChoices, wideBoxVariants } from '../concrete-box/boxVariants.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
+import { castInFaults } from './castInPiers.ts';
 import { choosePierDepth } from './choosePierDepth.ts';
 import { haunchedCuts, haunchedDepth, haunchedElevation } from './haunchedDrawing.ts';
 import { haunchedLines } from './haunchedLines.ts';
-import { haunchedFigures, haunchedOwnShare, haunchedReactions } from './haunchedReport.ts';
+import { haunchedCastIn, haunchedFigures, haunchedOwnShare, haunchedReactions } from './haunchedReport.ts';
 import { haunchedWarnings } from './haunchedWarnings.ts';
 
 /**
@@ -30,19 +31,24 @@ export const cantileverBox: FormModule = {
     { kind: 'flanked', approach: 'composite-i', side: [0.55, 0.7] },
   ],
   methods: ['balanced-cantilever'],
-  choices: boxChoices,
-  faults: boxFaults,
+  choices: [...boxChoices, 'castInPiers'],
+  faults,
   variants: (spansM, deck, method) =>
     wideBoxVariants(spansM, deck, method, midspanDepthBand('cantilever-box')![1]),
   size,
 };
 
+function faults(task: Omit<UnitTask, 'depthM'>): Problem[] {
+  return [...boxFaults(task), ...castInFaults(task)];
+}
+
 /** @throws RangeError for spans, depth, widths or concrete that are not possible */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
-  checkBoxTask(task);
+  refuse(faults(task));
   const { model, box, checks } = choosePierDepth(task);
   const reactions = haunchedReactions(model, box);
+  const castIn = haunchedCastIn(model, box);
   const warnings = [...overLimit(checks, 'tendons and concrete'), ...haunchedWarnings(model, box)];
   if (!heightUnder(task).known)
     warnings.push(
@@ -55,6 +61,7 @@ function size(task: UnitTask): Design {
     elevation: haunchedElevation(model, box),
     sections: haunchedCuts(model, box),
     reactions,
+    ...(castIn.length > 0 ? { castIn } : {}),
     checks,
     limitingCheck: limiting(checks),
     ownWeightShare: haunchedOwnShare(model, box),

@@ -6,7 +6,9 @@ import { trafficOnBox, type BoxTraffic } from '../concrete-box/boxTraffic.ts';
 import { supportPositions } from '../common/supports.ts';
 import { anchorsOf, type Anchor } from './anchors.ts';
 import { tipsM, type Arm } from './arms.ts';
+import { castInSupports } from './castInPiers.ts';
 import { haunchShare, pierDepths, placeAt } from './haunch.ts';
+import { betweenHeldAndFree, heldPier, type HeldPier } from './heldPiers.ts';
 import { overSupports, type OverSupports } from './parasitic.ts';
 
 /** Line beam of a haunched deck with the traffic on it. Its stiffness is 1 at midspan, less in lightweight concrete. */
@@ -18,6 +20,8 @@ export interface StiffDeck {
   readonly overSupports: OverSupports;
   /** What holds longer arms down, in the order in which it is called upon. */
   readonly anchors: readonly Anchor[];
+  /** Piers that the deck is cast in with. */
+  readonly heldPiers: readonly HeldPier[];
 }
 
 /** Stations of a span. */
@@ -45,6 +49,7 @@ export function stiffDeck(
     exponent,
     task.light,
     task.strengthMPa,
+    task.castInPiers,
   ]);
   const known = kept.get(key);
   if (known) return known;
@@ -63,12 +68,16 @@ export function stiffDeck(
     extraStationsM: tipsM(arms, task.spansM, stationsPerSpan),
   };
   const beam = lineBeam(geometry);
+  const castIn = castInSupports(task);
+  const load = trafficOnDeck(task.standard, task.deck);
+  const free = trafficOnBox(beam, load);
   const made: StiffDeck = {
     beam,
     stiffness: beam.xM.map(stiffness),
     overSupports: overSupports(beam),
     anchors: anchorsOf(arms, task.light !== undefined, { ...geometry, beam }),
-    traffic: trafficOnBox(beam, trafficOnDeck(task.standard, task.deck)),
+    traffic: castIn.length > 0 ? betweenHeldAndFree(geometry, castIn, free) : free,
+    heldPiers: castIn.map((support) => heldPier(geometry, support, load)),
   };
   if (kept.size >= 64) for (const [oldest] of [...kept].slice(0, 32)) kept.delete(oldest);
   kept.set(key, made);

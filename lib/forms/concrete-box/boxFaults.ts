@@ -31,9 +31,8 @@ export function boxFaults(task: Asked): Problem[] {
   ];
 }
 
-/** @throws RangeError saying why a box cannot be made as it is asked */
-export function checkBoxTask(task: Asked): void {
-  const faults = boxFaults(task);
+/** @throws RangeError saying why a box cannot be made as it is asked, where there is a fault */
+export function refuse(faults: readonly Problem[]): void {
   if (faults.length > 0) throw new RangeError(sentences(faults).join(' '));
 }
 

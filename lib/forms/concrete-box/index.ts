@@ -10,7 +10,7 @@ import { boxElevation, boxSections } from './boxDrawing.ts';
 import { boxFigures, boxReactions, ownWeightShare } from './boxReport.ts';
 import { boxLines } from './boxLines.ts';
 import { boxModel } from './boxModel.ts';
-import { boxFaults, checkBoxTask } from './boxFaults.ts';
+import { boxFaults, refuse } from './boxFaults.ts';
 import { boxChoices, wideBoxVariants } from './boxVariants.ts';
 import { heightUnder } from './heightUnder.ts';
 import { sizeBox } from './sizeBox.ts';
@@ -41,7 +41,7 @@ export const concreteBox: FormModule = {
 /** @throws RangeError for spans, depth, widths or concrete that are not possible */
 function size(task: UnitTask): Design {
   checkUnitTask(task);
-  checkBoxTask(task);
+  refuse(boxFaults(task));
   const model = boxModel(task);
   const box = sizeBox(model);
   const checks = boxChecks(model, box);
