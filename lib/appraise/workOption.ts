@@ -3,6 +3,7 @@ import type {
   Design,
   MadeOption,
   RoadProfile,
+  ShaftUnder,
   Site,
   Unit,
   UnitTask,
@@ -22,6 +23,7 @@ import {
   foundationsCost,
   placeText,
   settingAt,
+  shaftsUnder,
   standOneSupport,
   standSupports,
   strikesAt,
@@ -151,16 +153,26 @@ function workOn(
     depthM: depthsM.flatMap((d) => [constructionDepth(site.deck, d), constructionDepth(site.deck, d)]),
   };
   const before = roadOver(guess);
-  const designs = units.map((unit, k) => size(taskOf(bench, option, unit, depthsM[k]!, before)));
-  const isAsDeep = designs.every(({ depthAlong: { depthM } }, k) =>
-    depthM.every((d) => Math.abs(d - depthsM[k]!) < SAME_DEPTH_M),
-  );
-  const profile = isAsDeep ? before : roadOver(depthAlong(site, units, designs));
-  const supports = standing(bench, units, designs, profile);
+  const tasks = units.map((unit, k) => taskOf(bench, option, unit, depthsM[k]!, before));
+  const stood = (designs: readonly Design[]): Pick<AtDepth, 'designs' | 'profile' | 'supports'> => {
+    const isAsDeep = designs.every(({ depthAlong: { depthM } }, k) =>
+      depthM.every((d) => Math.abs(d - depthsM[k]!) < SAME_DEPTH_M),
+    );
+    const profile = isAsDeep ? before : roadOver(depthAlong(site, units, designs));
+    return { designs, profile, supports: standing(bench, units, designs, profile) };
+  };
+  const first = stood(tasks.map(size));
+  // Shafts that a deck is cast in with hold it where it moves: it is sized once more over those that stand under it.
+  const { designs, profile, supports } = first.designs.some(({ castIn }) => castIn)
+    ? stood(tasks.map((task, k) => size(overShafts(task, shaftsUnder(units[k]!, first.supports)))))
+    : first;
   const programme = planProgramme(site, designs, supports);
   const lines = [...measure(site, designs, supports, profile), ...programme.lines];
   return { designs, profile, supports, lines, months: programme.months };
 }
+
+const overShafts = (task: UnitTask, shafts: readonly ShaftUnder[]): UnitTask =>
+  shafts.length > 0 ? { ...task, shafts } : task;
 
 const keyOf = ({ form, method, units, variant = {} }: MadeOption, depthsM: readonly number[]): string =>
   JSON.stringify([form, method, units, depthsM, variant]);

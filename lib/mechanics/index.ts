@@ -1,6 +1,8 @@
 export type { BeamGeometry } from './beam/beamMesh.ts';
 export { lineBeam, type LineBeam } from './beam/lineBeam.ts';
 export type { Effects } from './beam/effects.ts';
+export { coupleAt, type CoupleEffects } from './beam/couple.ts';
+export { solveDense } from './members/solveDense.ts';
 export {
   distributed,
   elementAt,

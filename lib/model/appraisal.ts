@@ -69,8 +69,11 @@ export interface Articulation {
 export interface ShaftInFrame {
   /** Bending stiffness that cracks and creep leave it, kNm2. */
   readonly eiKNm2: number;
-  /** How far the deck moves over it from where it was cast, mm, and the moment at its foot from that. */
+  /** Chainage of the point of the deck that stays, m. */
+  readonly stillM: number;
+  /** How far the deck moves over it from where it was cast, mm, what of that is cooling, and the moment at its foot from it. */
   readonly pushMm: number;
+  readonly cooledMm: number;
   readonly pushedKNm: number;
   /** Moment at its top from what is laid on the deck and from traffic. */
   readonly turnedKNm: number;

@@ -36,6 +36,8 @@ export interface UnitTask {
   readonly ballastKNm?: readonly number[];
   /** Cantilevered boxes: neighbouring piers in the middle that the deck is cast in with; on bearings everywhere when absent. */
   readonly castInPiers?: number;
+  /** Cantilevered boxes: the shafts they are cast in with, once these stand; their restraint is not reckoned with when absent. */
+  readonly shafts?: readonly ShaftUnder[];
   /** Thickness of an orthotropic deck plate, m, where it is given; by wheels and surfacing when absent. */
   readonly deckPlateM?: number;
   /** Cable-stayed: which supports (0-based) carry pylons. */
@@ -153,6 +155,19 @@ export interface WallQuake {
   readonly acrossKN: number;
   /** Height over the top of the foundation at which the force across acts, m. */
   readonly acrossAboveM: number;
+}
+
+/** A shaft that a deck is cast in with, as it stands under it. */
+export interface ShaftUnder {
+  /** Which support of the unit, 0-based. */
+  readonly support: number;
+  /** From its foot to the deck, m. */
+  readonly heightM: number;
+  /** Bending stiffness along the road with what cracks and creep leave of it, kNm2. */
+  readonly eiKNm2: number;
+  /** How far the deck moves over it as it shortens and as it cools, m; positive towards the end of the unit. */
+  readonly shortenedM: number;
+  readonly cooledM: number;
 }
 
 /** A pier in one with the deck, without bearings, as the deck meets it. */

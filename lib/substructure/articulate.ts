@@ -4,7 +4,7 @@ import { deckMaterial } from './deckMaterial.ts';
 import { depthOver } from './depthOver.ts';
 import { pushOf, type FrameAsk } from './framedShaft.ts';
 import { forceAlong, heldAlong, holdingForce, type UnitOnGround } from './heldAlong.ts';
-import { jointMovement, windOnDeck } from './loads.ts';
+import { jointMovement, windOnDeck, type DeckMaterial } from './loads.ts';
 
 /** How one unit is held at one of its supports. Forces characteristic, kN; movement to the fixed point, mm. */
 export interface Hold {
@@ -49,12 +49,19 @@ export function articulate(on: UnitOnGround, alone = false): Hold[] {
       // A pier that holds the deck bends with it.
       movementMm: isFixed ? 0 : movementMm,
       heldKN: own > 0 ? (weight * own) / all : 0,
-      ...(castIn ? { frame: frameOf(castIn, pushOf(material, Math.abs(chainage - held.stillM))) } : {}),
+      ...(castIn ? { frame: frameOf(castIn, material, chainage, held.stillM) } : {}),
     };
   });
 }
 
-const frameOf = ({ support: _at, ...pier }: CastInPier, pushM: number): FrameAsk => ({ ...pier, pushM });
+function frameOf(
+  { support: _at, ...pier }: CastInPier,
+  material: DeckMaterial,
+  chainageM: number,
+  stillM: number,
+): FrameAsk {
+  return { ...pier, ...pushOf(material, Math.abs(chainageM - stillM)), stillM };
+}
 
 /** Half the span on either side, m. */
 function tributary(x: readonly number[], i: number): number {

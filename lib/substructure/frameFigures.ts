@@ -234,6 +234,34 @@ export const frameFigures: readonly Descriptor[] = [
     compute: (v) => 1000 * ((v.expansion * v.range) / 2 + v.shortening) * Math.abs(v.here - v.still),
   }),
   described({
+    path: frame('stillM'),
+    label: on('point that stays when the deck over the shaft moves'),
+    unit: 'm',
+    method: 'as held',
+    formula:
+      'the pier, where the deck is cast in with it alone; else the centre of stiffness of those it is cast in with',
+    inputs: (at) => ({ still: stillPath(at, castInUnit(at)!.unit) }),
+    compute: ({ still }) => still,
+  }),
+  described({
+    path: frame('cooledMm'),
+    label: on('movement of the deck over the shaft as it cools'),
+    unit: 'mm',
+    method: 'product',
+    formula: '1000 x expansion x range of temperature / 2 x distance to the point that stays',
+    inputs: (at) => {
+      const of = (name: string): string =>
+        `data/substructure/movement/${deckMaterial(at.option.designs[castInUnit(at)!.unit]!)}/${name}`;
+      return {
+        here: `${at.foot}/chainageM`,
+        still: `${at.foot}/articulation/frame/stillM`,
+        expansion: of('expansionPerK'),
+        range: of('rangeK'),
+      };
+    },
+    compute: (v) => ((1000 * v.expansion * v.range) / 2) * Math.abs(v.here - v.still),
+  }),
+  described({
     path: frame('pushedKNm'),
     label: on('moment at the foot of the shaft from that movement'),
     unit: 'kNm',
@@ -291,6 +319,30 @@ export const frameFigures: readonly Descriptor[] = [
       share: pier('verticalShare'),
     }),
   }),
+  ...(
+    [
+      ['heightM', 'height of the shaft', 'm'],
+      ['eiKNm2', 'bending stiffness of the shaft', 'kNm2'],
+      ['shortenedM', 'movement of the deck over the shaft as it shortens', 'm'],
+      ['cooledM', 'movement of the deck over the shaft as it cools', 'm'],
+    ] as const
+  ).map(([field, label, unit]) =>
+    described({
+      path: `options/:option/designs/:unit/task/shafts/:k/${field}`,
+      label: (at) =>
+        `${label} under support ${at.design.task.shafts![at.index('k')]!.support + 1} of the unit`,
+      unit,
+      method: 'as it stands',
+      formula:
+        'of the shafts that stand under the deck while it is sized without their restraint, heights to 0.1 m and movements to 1 mm; towards the end of the unit positive',
+      inputs: (at) => ({
+        at: `${at.root}/units/${at.name('unit')}/supportsM/${at.design.task.shafts![at.index('k')]!.support}`,
+        asked: `${at.unit}/task/castInPiers`,
+        depth: `${at.unit}/task/depthM`,
+        road: ['site/road/startLevelM', 'site/road/endLevelM'],
+      }),
+    }),
+  ),
   ...(
     [
       [

@@ -6,7 +6,9 @@ import type { AlongUse } from './sizeShaft.ts';
 export function framedReport(ask: FrameAsk, shaft: FramedShaft, use: AlongUse): ShaftInFrame {
   return {
     eiKNm2: shaft.eiKNm2,
+    stillM: ask.stillM,
     pushMm: 1000 * ask.pushM,
+    cooledMm: 1000 * ask.cooledM,
     pushedKNm: pushedBy(shaft, ask.pushM).footKNm,
     turnedKNm: turnedBy(shaft, ask.laidKNm + ask.trafficKNm).topKNm,
     ...use,

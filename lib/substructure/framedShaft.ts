@@ -19,18 +19,24 @@ export interface EndMoments {
 
 /** What a deck does to the pier it is cast in with. */
 export type FrameAsk = Omit<CastInPier, 'support'> & {
-  /** How far the deck moves over it from where it was cast, m. */
+  /** How far the deck moves over it from where it was cast, m, what of that is cooling, and the chainage that stays. */
   readonly pushM: number;
+  readonly cooledM: number;
+  readonly stillM: number;
 };
 
 /**
  * How far a deck moves one way over a pier it is cast in with, m: half of the range of temperature and all of its shortening
  * over the length to the point that stays, m. Bearings have both ways of temperature.
  */
-export const pushOf = (material: DeckMaterial, lengthM: number): number => {
+export function pushOf(
+  material: DeckMaterial,
+  lengthM: number,
+): { readonly pushM: number; readonly cooledM: number } {
   const { expansionPerK, rangeK, shorteningPerM } = substructureData.movement[material];
-  return thermalMovement(expansionPerK, rangeK / 2, lengthM) / 1000 + shorteningPerM * lengthM;
-};
+  const cooledM = thermalMovement(expansionPerK, rangeK / 2, lengthM) / 1000;
+  return { pushM: cooledM + shorteningPerM * lengthM, cooledM };
+}
 
 /** Stiffness of a shaft against its top turning while it stays in its place, 4 E I / h, kNm per radian. */
 const turnOf = ({ eiKNm2, heightM }: FramedShaft): number => (4 * eiKNm2) / heightM;

@@ -6,5 +6,6 @@ export { settingAt, type Setting } from './setting.ts';
 export { placeText } from './placeText.ts';
 export { standOneSupport } from './standOneSupport.ts';
 export type { SupportAsk } from './supportAsk.ts';
+export { shaftsUnder } from './shaftsUnder.ts';
 export { standSupports } from './standSupports.ts';
 export { expectedLines, foundationsCost } from './supportLines.ts';

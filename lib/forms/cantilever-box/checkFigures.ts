@@ -5,7 +5,7 @@ import { anyBoxFigures } from '../concrete-box/anyBoxFigures.ts';
 const manual = formManual('cantilever-box');
 const { check } = manual;
 const weight = ['span*OwnKNm', 'span*OpenKNm', 'pier*OwnKNm', 'pier*OpenKNm'] as const;
-const traffic = ['span*TrafficKNm', 'pier*TrafficKNm'] as const;
+const traffic = ['span*TrafficKNm', 'pier*TrafficKNm', 'span*RestraintKNm', 'pulled*KN'] as const;
 const pierSection = ['pierAreaM2', 'pierInertiaM4', 'pierCentroidFromTopM'] as const;
 const midSection = ['areaM2', 'inertiaM4', 'centroidFromTopM'] as const;
 const overPier = [

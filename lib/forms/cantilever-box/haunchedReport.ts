@@ -8,6 +8,7 @@ import { haunchedBars } from './haunchedBars.ts';
 import { worstHold } from './haunchedChecks.ts';
 import { heldKNm } from './heldPiers.ts';
 import { along, onFalseworkM, strandTotalKg, underSlabTotalM3, travellersOf } from './haunchedLines.ts';
+import { restraintInUse } from './restraint.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
 
 /**
@@ -36,7 +37,7 @@ export function haunchedCastIn(model: CantileverModel, { sections }: SizedHaunch
   const midspanKNm2 = concrete.ecmMPa * 1e3 * sections.midspan.inertiaM4;
   return heldPiers.map((pier) => ({
     support: pier.support,
-    deckTurnKNm: midspanKNm2 * pier.turn1PerM,
+    deckTurnKNm: midspanKNm2 * pier.turnKNm,
     laidKNm: Math.abs(heldKNm(pier, laidWhenJoined(task, anchors))),
     trafficKNm: pier.trafficKNm,
   }));
@@ -71,6 +72,19 @@ function heldFigures(model: CantileverModel, { weight, thicknesses }: SizedHaunc
     if (!own) return;
     figures[`span${span + 1}HoldingWebM`] = own.webM;
     figures[`span${span + 1}HoldingBottomM`] = own.bottomM;
+  });
+  return figures;
+}
+
+/** Named figures of what shafts do that the deck is cast in with; none where it stands on bearings or they are not known. */
+function restraintFigures(model: CantileverModel, { sections }: SizedHaunched): Record<string, number> {
+  const held = restraintInUse(model, sections);
+  if (held === null) return {};
+  const figures: Record<string, number> = {
+    pulledKN: held.lastingPulledKN.reduce((most, kN) => Math.max(most, kN), 0),
+  };
+  model.task.spansM.forEach((_, span) => {
+    figures[`span${span + 1}RestraintKNm`] = held.lastingMax[middleStation(model.beam, span)]!;
   });
   return figures;
 }
@@ -132,6 +146,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     strandKgM2: strandTotalKg(model, box) / areaM2,
   };
   Object.assign(figures, heldFigures(model, box));
+  Object.assign(figures, restraintFigures(model, box));
   Object.assign(figures, madeFigures(model, beam.xM, sections.areaM2));
   for (let span = 0; span < task.spansM.length; span++) {
     const middle = middleStation(beam, span);

@@ -17,6 +17,10 @@ export function haunchedWarnings(model: CantileverModel, { weight }: SizedHaunch
     warnings.push(
       `Until its arms are joined a pier takes up to ${(weight.unbalancedKNm / 1e3).toFixed(0)} MNm with one arm a segment ahead: ${builtIn(model)}.`,
     );
+  if (model.heldPiers.length > 0 && model.task.shafts === undefined)
+    warnings.push(
+      'Shafts that the deck is cast in with are not known: what they hold it back by as it shortens and cools is not reckoned with.',
+    );
   const last = model.task.spansM.length - 1;
   for (const hold of weight.holds) {
     const arm = model.arms[hold.anchor.longer]!;

@@ -1,11 +1,12 @@
 import { plainQuest, trafficOnLine, type TrafficLoad } from '../../actions/index.ts';
 import {
   beamTrack,
+  coupleAt,
   lineBeam,
   momentLine,
-  settle,
   uniform,
   type BeamGeometry,
+  type CoupleEffects,
   type Extremes,
   type LineBeam,
 } from '../../mechanics/index.ts';
@@ -20,8 +21,10 @@ export interface HeldPier {
   readonly support: number;
   readonly left: LineBeam;
   readonly right: LineBeam;
-  /** Couple that turns it over the pier, per radian and kNm2 of stiffness at midspan, 1/m. */
-  readonly turn1PerM: number;
+  /** A couple of 1 kNm on the joined deck over the pier, all supports letting it turn, its stiffness at midspan 1 kNm2. */
+  readonly couple: CoupleEffects;
+  /** Couple that turns it over the pier by one radian, of that deck, kNm. */
+  readonly turnKNm: number;
   /** Couple that keeps it from turning under traffic, the most either way, kNm. */
   readonly trafficKNm: number;
 }
@@ -40,16 +43,24 @@ function pieceOf(geometry: DeckGeometry, from: number, to: number, held: readonl
 }
 
 /** A pier that keeps the deck from turning: the couple that the two sides of it put into the pier, and their stiffness. */
-export function heldPier(geometry: DeckGeometry, support: number, load: TrafficLoad): HeldPier {
+export function heldPier(
+  geometry: DeckGeometry,
+  beam: LineBeam,
+  support: number,
+  load: TrafficLoad,
+): HeldPier {
   const left = pieceOf(geometry, 0, support, [support]);
   const right = pieceOf(geometry, support, geometry.spansM.length, [support]);
+  const station = beam.supportAt[support]!;
+  const couple = coupleAt(beam, station);
   const atLeft = extremesAt(left, left.xM.length - 1, load);
   const atRight = extremesAt(right, 0, load);
   return {
     support,
     left,
     right,
-    turn1PerM: turnOf(left, true) + turnOf(right, false),
+    couple,
+    turnKNm: 1 / couple.turnRad[station]!,
     // The two sides are loaded each where it is adverse: one hogs the more, the other the less.
     trafficKNm: Math.max(atLeft.max - atRight.min, atRight.max - atLeft.min),
   };
@@ -59,20 +70,6 @@ function extremesAt(beam: LineBeam, station: number, load: TrafficLoad): Extreme
   const out: Extremes = { max: 0, min: 0 };
   trafficOnLine(load, beamTrack(beam), momentLine(beam, station), { ...plainQuest, hogging: true }, out);
   return out;
-}
-
-/**
- * Moment at the built-in end of a beam turned by one radian: that of settling its supports by their distance from there,
- * for turning the whole beam back strains nothing.
- */
-function turnOf(beam: LineBeam, atEnd: boolean): number {
-  const { xM, supportAt } = beam;
-  const held = atEnd ? xM.length - 1 : 0;
-  const { momentKNm } = settle(
-    beam,
-    supportAt.map((station) => Math.abs(xM[station]! - xM[held]!)),
-  );
-  return Math.abs(momentKNm[held]!);
 }
 
 /** Couple that keeps the deck from turning over a pier under a load per metre, kN/m, of each span or of all, kNm. */

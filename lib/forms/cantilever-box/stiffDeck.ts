@@ -77,7 +77,7 @@ export function stiffDeck(
     overSupports: overSupports(beam),
     anchors: anchorsOf(arms, task.light !== undefined, { ...geometry, beam }),
     traffic: castIn.length > 0 ? betweenHeldAndFree(geometry, castIn, free) : free,
-    heldPiers: castIn.map((support) => heldPier(geometry, support, load)),
+    heldPiers: castIn.map((support) => heldPier(geometry, beam, support, load)),
   };
   if (kept.size >= 64) for (const [oldest] of [...kept].slice(0, 32)) kept.delete(oldest);
   kept.set(key, made);

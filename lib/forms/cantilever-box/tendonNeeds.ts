@@ -6,6 +6,7 @@ import { cantileverData } from './cantileverData.ts';
 import { parasiticKNm } from './parasitic.ts';
 import { betweenZeros, workingWidthM } from '../concrete-box/shearLag.ts';
 import type { CantileverModel } from './cantileverModel.ts';
+import { restraintInUse } from './restraint.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
 import { creepShare, type StagedWeight } from './stages.ts';
 
@@ -40,6 +41,9 @@ export interface UseMoments {
   /** What is laid and drives on the deck, factored. */
   readonly ultimateMax: Float64Array;
   readonly ultimateMin: Float64Array;
+  /** Pull of shafts that hold the deck as it cools, and as it has shortened as well, kN; absent where none does. */
+  readonly openPulledKN?: Float64Array;
+  readonly lastingPulledKN?: Float64Array;
 }
 
 /** The deck just joined, and after creep and losses; tendons over the piers bend the joined deck only as it creeps. */
@@ -92,12 +96,33 @@ export function withParasitic(
   };
 }
 
-/** Moments of the deck in use, from weight through its stages, superimposed load, traffic and temperature gradient. */
+/**
+ * Moments of the deck in use, from weight through its stages, superimposed load, traffic, temperature gradient, and the
+ * restraint of shafts that it is cast in with.
+ */
 export function useMoments(
   model: CantileverModel,
   sections: HaunchedSections,
   weight: StagedWeight,
 ): UseMoments {
+  const use = freeMoments(model, sections, weight);
+  const held = restraintInUse(model, sections);
+  if (held === null) return use;
+  const both = (key: Exclude<keyof UseMoments, 'openPulledKN' | 'lastingPulledKN'>): Float64Array =>
+    use[key].map((moment, i) => moment + held[key][i]!);
+  return {
+    ...held,
+    openMax: both('openMax'),
+    openMin: both('openMin'),
+    lastingMax: both('lastingMax'),
+    lastingMin: both('lastingMin'),
+    ultimateMax: both('ultimateMax'),
+    ultimateMin: both('ultimateMin'),
+  };
+}
+
+/** The same of a deck that no shaft holds. */
+function freeMoments(model: CantileverModel, sections: HaunchedSections, weight: StagedWeight): UseMoments {
   const { gradient } = boxData;
   const { uls } = model.standard.factors;
   const { service, most } = model.traffic;
@@ -183,6 +208,7 @@ export function strandsNeeded(
   const states = [open, lasting] as const;
   const maxima = [use.openMax, use.lastingMax] as const;
   const minima = [use.openMin, use.lastingMin] as const;
+  const pulls = [use.openPulledKN, use.lastingPulledKN] as const;
   const { coverM: topCover } = cantileverData.topTendons;
   const { coverM: lowCover } = cantileverData.bottomTendons;
   const { uls } = model.standard.factors;
@@ -215,9 +241,10 @@ export function strandsNeeded(
       const extra = spread * (state.topParasitic * pt + state.bottomParasitic * pb);
       const t = spread * nt * state.topKN;
       const b = spread * nb * state.bottomKN;
-      const topShort = -(b / area + (min + extra - b * eb) * yt + tension);
+      const pull = (pulls[k]?.[i] ?? 0) / area;
+      const topShort = pull - (b / area + (min + extra - b * eb) * yt + tension);
       top[i] = Math.max(top[i]!, topShort / (spread * state.topKN * (1 / area + et * yt)));
-      const lowShort = (max + extra + t * et) * yb - t / area - tension;
+      const lowShort = pull + (max + extra + t * et) * yb - t / area - tension;
       bottom[i] = Math.max(bottom[i]!, lowShort / (spread * state.bottomKN * (1 / area + eb * yb)));
     }
     const depth = model.depthM[i]!;

@@ -22,7 +22,7 @@ export interface Words<I extends Inputs> {
 
 /**
  * What a figure hangs on, in short: `spans`, figures of the unit by name (`pier*HogDesignKNm` is all of them), its
- * steel lines (`steel`), what is laid in its cells span by span (`ballast`), paths of the unit (`./task/depthM`; `./task/light?` only where the task has it), any other path;
+ * steel lines (`steel`), what is laid in its cells span by span (`ballast`), shafts it is cast in with (`shafts`), paths of the unit (`./task/depthM`; `./task/light?` only where the task has it), any other path;
  * `:standard` is the load standard.
  */
 export type Short = string;
@@ -58,6 +58,10 @@ function pathsOf(at: At, short: Short): string[] {
   if (short === 'steel') return steelLinesOf(at);
   if (short === 'ballast')
     return (at.design.task.ballastKNm ?? []).map((_, i) => `${at.unit}/task/ballastKNm/${i}`);
+  if (short === 'shafts')
+    return (at.design.task.shafts ?? []).flatMap((_, k) =>
+      ['heightM', 'eiKNm2', 'shortenedM', 'cooledM'].map((field) => `${at.unit}/task/shafts/${k}/${field}`),
+    );
   if (short.endsWith('?')) return asked(at, short.slice(0, -1)) ? pathsOf(at, short.slice(0, -1)) : [];
   if (short.startsWith('./')) return [`${at.unit}${short.slice(1)}`];
   if (short.includes('/')) return [short.replace(':standard', at.design.task.standard)];

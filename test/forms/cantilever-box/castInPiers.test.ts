@@ -1,8 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { trafficOnDeck } from '../../../lib/actions/index.ts';
 import { castInFaults, castInSupports } from '../../../lib/forms/cantilever-box/castInPiers.ts';
-import { heldKNm, heldPier } from '../../../lib/forms/cantilever-box/heldPiers.ts';
+import { heldKNm, heldPier, type DeckGeometry } from '../../../lib/forms/cantilever-box/heldPiers.ts';
 import { cantileverBox } from '../../../lib/forms/cantilever-box/index.ts';
+import { lineBeam } from '../../../lib/mechanics/index.ts';
 import { plainDeck } from '../composite-i/cases.ts';
 import { cantileverTask } from './cases.ts';
 
@@ -35,20 +36,21 @@ describe('castInSupports()', () => {
 
 describe('heldPier()', () => {
   const load = trafficOnDeck('lm1', plainDeck(12));
+  const held = (deck: DeckGeometry) => heldPier(deck, lineBeam(deck), 1, load);
   const even = { spansM: [40, 60], eiKNm2: () => 1, stationsPerSpan: 20, extraStationsM: [] };
 
   it('turns a deck of constant stiffness by 3 E I / l on either side of its pier, the far ends turning', () => {
-    expect(heldPier(even, 1, load).turn1PerM).toBeCloseTo(3 / 40 + 3 / 60, 9);
+    expect(held(even).turnKNm).toBeCloseTo(3 / 40 + 3 / 60, 9);
     const long = { ...even, spansM: [40, 60, 40] };
     // Right of the first pier the span of 60 m, whose far end turns against the 40 m beyond: 4 / a - (2 / a)^2 / (4 / a + 3 / b).
     const [a, b] = [60, 40];
     const right = 4 / a - (2 / a) ** 2 / (4 / a + 3 / b);
-    expect(heldPier(long, 1, load).turn1PerM).toBeCloseTo(3 / 40 + right, 9);
+    expect(held(long).turnKNm).toBeCloseTo(3 / 40 + right, 9);
   });
 
   it('holds an even load by the difference of w l^2 / 8 on both sides', () => {
-    expect(heldKNm(heldPier(even, 1, load), 10)).toBeCloseTo((10 * (60 ** 2 - 40 ** 2)) / 8, 6);
-    expect(heldKNm(heldPier(even, 1, load), [20, 10])).toBeCloseTo((10 * 60 ** 2 - 20 * 40 ** 2) / 8, 6);
+    expect(heldKNm(held(even), 10)).toBeCloseTo((10 * (60 ** 2 - 40 ** 2)) / 8, 6);
+    expect(heldKNm(held(even), [20, 10])).toBeCloseTo((10 * 60 ** 2 - 20 * 40 ** 2) / 8, 6);
   });
 });
 
