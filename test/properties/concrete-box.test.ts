@@ -120,7 +120,9 @@ describe('concreteBox.size() moves the right way', () => {
     (task) => ({ ...task, spansM: task.spansM.map((span) => 1.15 * span), depthM: 1.15 * task.depthM }),
     (before, after) => {
       expect(after.figures.concreteM3M2!).toBeGreaterThan(before.figures.concreteM3M2!);
-      expect(after.figures.strandKgM2!).toBeGreaterThan(before.figures.strandKgM2!);
+      // On short spans less of the flanges works, which a longer span makes good.
+      if (before.figures.workingWidthAtPiersM! > 0.5 * before.task.deck.widthM)
+        expect(after.figures.strandKgM2!).toBeGreaterThan(before.figures.strandKgM2!);
     },
     611,
   );

@@ -6,8 +6,8 @@ const manual = formManual('cantilever-box');
 const { check } = manual;
 const weight = ['span*OwnKNm', 'span*OpenKNm', 'pier*OwnKNm', 'pier*OpenKNm'] as const;
 const traffic = ['span*TrafficKNm', 'pier*TrafficKNm', 'span*RestraintKNm', 'pulled*KN'] as const;
-const pierSection = ['pierAreaM2', 'pierInertiaM4', 'pierCentroidFromTopM'] as const;
-const midSection = ['areaM2', 'inertiaM4', 'centroidFromTopM'] as const;
+const pierSection = ['pierAreaM2', 'pierInertiaM4', 'pierCentroidFromTopM', 'workingWidthAtPiersM'] as const;
+const midSection = ['areaM2', 'inertiaM4', 'centroidFromTopM', 'workingWidthM'] as const;
 const overPier = [
   'strands over the pier at their design strength x lever to the bottom slab',
   'topStrandCount',

@@ -1,7 +1,7 @@
 import type { CastInPier, SupportReaction } from '../../model/index.ts';
 import { middleStation } from '../common/middleStation.ts';
 import { madeFigures } from '../concrete-box/boxConcrete.ts';
-import { underSlabFigures } from '../concrete-box/boxReport.ts';
+import { underSlabFigures, workingFigures } from '../concrete-box/boxReport.ts';
 import { underSlabBarsKg } from '../concrete-box/underSlab.ts';
 import { laidWhenJoined, type CantileverModel } from './cantileverModel.ts';
 import { haunchedBars } from './haunchedBars.ts';
@@ -109,7 +109,8 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
-    ...underSlabFigures(layout, task.spansM),
+    ...workingFigures(layout, task.spansM),
+    ...underSlabFigures(layout),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,

@@ -64,7 +64,8 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     ...(layout.across
       ? { acrossStrandKgM2: layout.across.strandKgM2, acrossForceKNm: layout.across.forceKNm }
       : {}),
-    ...underSlabFigures(layout, task.spansM),
+    ...workingFigures(layout, task.spansM),
+    ...underSlabFigures(layout),
     webM: thicknesses.webM,
     webAtSupportsM: thicknesses.supportWebM,
     bottomSlabM: thicknesses.bottomM,
@@ -114,14 +115,18 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
   return figures;
 }
 
-/** Named figures of struts or ribs and of the wings on them; none without. */
-export function underSlabFigures(layout: BoxLayout, spansM: readonly number[]): Record<string, number> {
-  const { struts, ribs } = layout;
-  if (!struts && !ribs) return {};
+/** Named figures of the width of the deck that works in bending. */
+export function workingFigures(layout: BoxLayout, spansM: readonly number[]): Record<string, number> {
   const { inSpanM, overPierM } = betweenZeros(spansM);
   return {
     workingWidthM: workingWidthM(layout, inSpanM),
     workingWidthAtPiersM: workingWidthM(layout, overPierM),
+  };
+}
+
+/** Named figures of struts or ribs; none without. */
+export function underSlabFigures({ struts, ribs }: BoxLayout): Record<string, number> {
+  return {
     ...(struts ? strutFigures(struts) : {}),
     ...(ribs
       ? {

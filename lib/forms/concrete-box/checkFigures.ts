@@ -5,14 +5,17 @@ import { anyBoxFigures } from './anyBoxFigures.ts';
 const manual = formManual('concrete-box');
 const { check } = manual;
 const moments = ['span*OwnKNm', 'span*TrafficKNm', 'pier*OwnKNm', 'pier*TrafficKNm'];
+/** What shear lag leaves of the flanges. */
+const working = ['workingWidthM', 'workingWidthAtPiersM'] as const;
 
 /** Limit states of a concrete box. */
 export const boxCheckFigures: readonly Descriptor[] = [
   ...check(
     'service-tension',
     [
-      'force with which P / A + P e / W balances the moments in service',
+      'force with which P / A + P e / W balances the moments in service, W with what works of the flanges',
       ...moments,
+      ...working,
       'areaM2',
       'inertiaM4',
       'eccentricityMidspanM',
@@ -61,8 +64,9 @@ export const boxCheckFigures: readonly Descriptor[] = [
     check(
       id,
       [
-        'P / A + P e / W + M / W at the fibre, greatest of stressing and service',
+        'P / A + P e / W + M / W at the fibre, W with what works of the flanges, greatest of stressing and service',
         ...moments,
+        ...working,
         'tendonForceKN',
         'areaM2',
         'inertiaM4',

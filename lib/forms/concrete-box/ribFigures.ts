@@ -31,7 +31,7 @@ export function ribFigures({ sized, check }: ReturnType<typeof formManual>): Des
         name,
         label,
         'm',
-        `box + 2 x (0.2 wing + 0.1 l0, at most 0.2 l0 and the wing), l0 = ${zeros} (EN 1992-1-1 5.3.2.1, from memory)`,
+        `on either side of every web 0.2 b + 0.1 l0, at most 0.2 l0 and b: b a wing or half of a cell, l0 = ${zeros} (EN 1992-1-1 5.3.2.1, from memory)`,
         './task/deck/widthM',
         'webSpacingM',
         'cells',

@@ -1,4 +1,4 @@
-import { polygonProperties } from '../../mechanics/index.ts';
+import { polygonProperties, type PolygonProperties } from '../../mechanics/index.ts';
 import type { BoxLayout } from './boxLayout.ts';
 import type { BoxSection } from './boxSection.ts';
 
@@ -31,45 +31,70 @@ export function betweenZeros(spansM: readonly number[]): BetweenZeros {
   };
 }
 
-/** Part of a wing that works in bending, m: 0.2 b + 0.1 l0, at most 0.2 l0 and b (EN 1992-1-1 5.3.2.1, from memory). */
-export function effectiveWingM(wingM: number, zerosM: number): number {
-  return Math.min(wingM, 0.2 * wingM + 0.1 * zerosM, 0.2 * zerosM);
+/** Part of a flange of a width, m, on one side of a web that works in bending, m: 0.2 b + 0.1 l0, at most 0.2 l0 and b (EN 1992-1-1 5.3.2.1, from memory). */
+export function effectiveFlangeM(widthM: number, zerosM: number): number {
+  return Math.min(widthM, 0.2 * widthM + 0.1 * zerosM, 0.2 * zerosM);
 }
 
-/** Whether the wings reach far beyond the webs because something carries them. */
-function isWide({ struts, ribs }: BoxLayout): boolean {
-  return struts !== undefined || ribs !== undefined;
-}
+/** Middle of a slab between two webs that does not work, m; both of them have half of it. */
+const idleBetweenM = (spacingM: number, zerosM: number): number =>
+  spacingM - 2 * effectiveFlangeM(spacingM / 2, zerosM);
 
-/** Width of the deck that works in bending, m; all of it where the wings are plain. */
+/** Width of the deck that works in bending, m: of its wings and of the slab of every cell. */
 export function workingWidthM(layout: BoxLayout, zerosM: number): number {
-  const { cells, spacingM, overhangM, struts } = layout;
-  const wingM = overhangM + (struts?.outM ?? 0);
-  return cells * spacingM + 2 * (isWide(layout) ? effectiveWingM(wingM, zerosM) : wingM);
+  const { cells, spacingM } = layout;
+  return 2 * reachM(layout, zerosM) - cells * idleBetweenM(spacingM, zerosM);
+}
+
+/** How far from the middle of the deck its wings work, m. */
+function reachM({ cells, spacingM, overhangM, struts }: BoxLayout, zerosM: number): number {
+  return (cells * spacingM) / 2 + effectiveFlangeM(overhangM + (struts?.outM ?? 0), zerosM);
 }
 
 /**
- * Shear lag of wings on struts or ribs, which reach far beyond their webs: bending finds the section without what does not work of
- * them, tendons press on all of it. Plain wings are short and count in full.
+ * Shear lag of the flanges: bending finds the section without what does not work of its wings and of the slabs between its
+ * webs, tendons press on all of it.
  */
 export function lagOf(layout: BoxLayout, section: BoxSection, zerosM: number): Lag {
-  const halfM = workingWidthM(layout, zerosM) / 2;
-  const { outer } = section.outline;
-  // The outline begins at an edge of the deck.
-  if (!isWide(layout) || halfM > -outer[0]![0] - 1e-9) return { top: 1, low: 1 };
-  const idle = polygonProperties(beyond(outer, halfM));
-  const { areaM2, topM, inertiaM4 } = section;
-  // Both edges, about the top of the slab.
-  const leftM2 = areaM2 - 2 * idle.areaM2;
-  const axisM = (areaM2 * topM + 2 * idle.areaM2 * idle.centroidM) / leftM2;
+  const { areaM2, topM, inertiaM4, depthM, bottomM } = section;
+  const { outer, cells, bottomWidthM } = section.outline;
+  const wing = beyond(outer, reachM(layout, zerosM));
+  const count = cells.length;
+  const idle: Part[] = [
+    // The outline begins at an edge of the deck.
+    ...(wing.length > 2 ? [polygonProperties(wing), polygonProperties(wing)] : []),
+    ...(count > 0
+      ? [
+          slab(count * idleBetweenM(layout.spacingM, zerosM), 0, layout.slab.midM),
+          slab(count * idleBetweenM(bottomWidthM / count, zerosM), depthM - bottomM, depthM),
+        ]
+      : []),
+  ].filter((part) => part.areaM2 > 1e-9);
+  if (idle.length === 0) return { top: 1, low: 1 };
+  const sum = (of: (part: Part) => number): number => idle.reduce((total, part) => total + of(part), 0);
+  // About the top of the slab; centroids of parts lie below it, at negative heights.
+  const leftM2 = areaM2 - sum((part) => part.areaM2);
+  const axisM = (areaM2 * topM + sum((part) => part.areaM2 * part.centroidM)) / leftM2;
   const leftM4 =
     inertiaM4 +
     areaM2 * topM ** 2 -
-    2 * (idle.inertiaM4 + idle.areaM2 * idle.centroidM ** 2) -
+    sum((part) => part.inertiaM4 + part.areaM2 * part.centroidM ** 2) -
     leftM2 * axisM ** 2;
   return {
     top: axisM / leftM4 / (topM / inertiaM4),
-    low: (section.depthM - axisM) / leftM4 / (section.lowM / inertiaM4),
+    low: (depthM - axisM) / leftM4 / (section.lowM / inertiaM4),
+  };
+}
+
+type Part = Pick<PolygonProperties, 'areaM2' | 'centroidM' | 'inertiaM4'>;
+
+/** A strip of slab between two depths below the top, m. */
+function slab(widthM: number, fromM: number, toM: number): Part {
+  const thickM = toM - fromM;
+  return {
+    areaM2: widthM * thickM,
+    centroidM: -(fromM + toM) / 2,
+    inertiaM4: (widthM * thickM ** 3) / 12,
   };
 }
 
