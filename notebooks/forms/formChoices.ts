@@ -175,7 +175,7 @@ export const formChoices: Readonly<Record<keyof Variant, FormChoice>> = {
         places: 0,
         step: 1,
         least: 1,
-        from: 2,
+        from: 1,
         empty: 'none, on bearings as usual',
       },
     ],

@@ -263,6 +263,7 @@ describe('choices of a form, asked of an option', () => {
       'ballastKNm',
     ]);
     expect(choicesOf('composite-i')).toEqual(['haunchRatio', 'substringers']);
+    expect(choicesOf('cantilever-box')).toEqual([...choicesOf('concrete-box'), 'castInPiers']);
     expect(choicesOf('truss')).toEqual([]);
   });
 
