@@ -127,9 +127,15 @@ export function withSpan(study: Study, option: AppraisedOption, span: number, le
   };
 }
 
-/** The study with the depth of an option typed, m; null leaves it to least cost again. */
-export const withDepth = (study: Study, option: AppraisedOption, depthM: number | null): Study =>
-  withKept(study, { ...keptOf(study, option), depthM });
+/**
+ * The study with the depth of an option typed, m; null leaves it to least cost again. Where nothing has been asked of how it
+ * is made it stays made as it is: a depth typed to see what it costs does not come back haunched.
+ */
+export function withDepth(study: Study, option: AppraisedOption, depthM: number | null): Study {
+  const kept = keptOf(study, option);
+  const variant = depthM === null ? kept.variant : (kept.variant ?? option.variant ?? {});
+  return withKept(study, { ...kept, depthM, ...(variant !== undefined && { variant }) });
+}
 
 /** The study with the way an option is asked to be made; null leaves it to least cost again. */
 export function withVariant(study: Study, option: AppraisedOption, variant: AskedVariant | null): Study {

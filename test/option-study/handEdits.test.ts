@@ -71,6 +71,14 @@ describe('withPier(study, option, index, chainageM)', () => {
     expect(read.ok && read.value.options.kept).toEqual(study.options.kept);
   });
 
+  it('stays made as it is where only its depth is typed, and is left to least cost again with it freed', () => {
+    const [typed] = withDepth(numbered, option, 1.2).options.kept;
+    expect(typed!.variant).toEqual(option.variant ?? {});
+    const asked = withDepth(withVariant(numbered, option, { haunchRatio: 1.6 }), option, 2.4);
+    expect(asked.options.kept[0]!.variant).toEqual({ haunchRatio: 1.6 });
+    expect('variant' in withDepth(numbered, option, null).options.kept[0]!).toBe(false);
+  });
+
   it('has the way it is made chosen by hand, kept in the file, and left to least cost again', () => {
     const chosen = withVariant(numbered, option, { haunchRatio: 1.6 });
     const read = readStudy(writeStudy(chosen));
