@@ -41,6 +41,7 @@ const handWords = ({ windows }: Site): string =>
 /** Section 1: the brief in prose, drawing and tables, each figure changed where it stands. */
 export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
   const { brief, books, site, reference, asItStands, hands } = cells;
+  const { head } = store.slices;
   const crossingCell = page.cell({
     station: '1+020',
     title: 'Crossing',
@@ -86,9 +87,10 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
       page.cell({
         station: '1+010',
         title: 'Brief',
-        shows: { brief },
+        shows: { brief, head },
         body: briefSentences(graph, store),
         notes: (v) => [
+          v.head.notice !== '' && h('p', {}, v.head.notice),
           h(
             'p',
             {},

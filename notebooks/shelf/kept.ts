@@ -1,5 +1,6 @@
 import { readStudy, survey, type Problem, type Site } from '../../lib/index.ts';
 import type { StoredStudy, StudyCupboard } from '../page/index.ts';
+import { untaken } from './untaken.ts';
 
 /** A study on the device as the shelf shows it. */
 export interface KeptStudy {
@@ -33,4 +34,10 @@ export function savedAtWords(savedAt: string, now: Date): string {
   const day = (of: Date): string => `${of.getFullYear()}-${two(of.getMonth() + 1)}-${two(of.getDate())}`;
   const time = `${two(date.getHours())}:${two(date.getMinutes())}`;
   return day(date) === day(now) ? `today ${time}` : `${day(date)} ${time}`;
+}
+
+/** Title of a duplicate, told from those that are there: 'Mill Lane, copy', 'Mill Lane, copy 2'. */
+export function copyTitle(title: string, titles: readonly string[]): string {
+  // A title is at most 500 characters long.
+  return untaken(`${title.slice(0, 480)}, copy`, titles);
 }

@@ -1,4 +1,4 @@
-import { readStudy, sentence, survey, writeStudy, type Site } from '../../lib/index.ts';
+import { readStudy, sentence, survey, writeStudy, type Site, type Study } from '../../lib/index.ts';
 import { scaleBar } from '../drawing/scaleBar.ts';
 import { largestScale } from '../drawing/scale.ts';
 import { sheet as drawingSheet } from '../drawing/sheet.ts';
@@ -17,7 +17,8 @@ import {
   type StudyCupboard,
 } from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
-import { keptStudies, type KeptStudy } from './kept.ts';
+import { copyTitle, keptStudies, type KeptStudy } from './kept.ts';
+import { newSentence } from './newSentence.ts';
 import { smallCrossing } from './smallCrossing.ts';
 import { studyHref, studyList } from './studyList.ts';
 
@@ -48,13 +49,16 @@ function exampleWords({ zones, lengthM, mainOpening }: Site): string {
 const answerWords = (kept: readonly KeptStudy[]): string => {
   const count = countWords(kept.length);
   const lie = kept.length === 0 ? 'yet' : 'and nowhere else';
-  return `${count.charAt(0).toUpperCase()}${count.slice(1)} ${kept.length < 2 ? 'study lies' : 'studies lie'} on this device ${lie}. Worked examples show what comes out: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.`;
+  return `${count.charAt(0).toUpperCase()}${count.slice(1)} ${kept.length < 2 ? 'study lies' : 'studies lie'} on this device ${lie}. For a new crossing, fill the sentence below; worked examples show what comes out: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.`;
 };
 
 function nextWords(kept: readonly KeptStudy[]): HtmlChild {
   const newest = kept.find(({ read }) => read.ok);
   return newest === undefined
-    ? h('a', { href: './option-study.html' }, 'open a worked example')
+    ? [
+        'fill gap 4 of the sentence, the length of the crossing, or ',
+        h('a', { href: './option-study.html' }, 'open a worked example'),
+      ]
     : [
         'open ',
         h('a', { href: studyHref(newest.stored.id) }, newest.stored.title),
@@ -88,16 +92,34 @@ async function start(): Promise<void> {
   const said = h('span', { class: 'state', role: 'status' });
   if (cupboard === null)
     said.textContent = 'This browser keeps no studies; open and save them as files in the option study.';
+  const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
+  /** Puts a study on the device under an id of its own; says why where it cannot. */
+  const keep = async (study: Study, refusedWith: string): Promise<string | null> => {
+    const id = crypto.randomUUID();
+    const saved = await shelf!.save(id, study, 0);
+    if (saved.ok) return id;
+    said.textContent = `${refusedWith} ${saved.problems.map(sentence).join(' ')}`;
+    return null;
+  };
+  const keepAndOpen = async (study: Study, refusedWith: string): Promise<void> => {
+    const id = await keep(study, refusedWith);
+    if (id !== null) location.assign(studyHref(id));
+  };
   const open = async (): Promise<void> => {
     const text = await openFile();
     if (text === null || cupboard === null) return;
     const read = readStudy(text);
-    const id = crypto.randomUUID();
-    const saved = read.ok
-      ? await studyShelf(cupboard, { readStudy, writeStudy }, () => new Date()).save(id, read.value, 0)
-      : read;
-    if (saved.ok) location.assign(studyHref(id));
-    else said.textContent = `Not opened. ${saved.problems.map(sentence).join(' ')}`;
+    if (read.ok) await keepAndOpen(read.value, 'Not opened.');
+    else said.textContent = `Not opened. ${read.problems.map(sentence).join(' ')}`;
+  };
+  const titles = (): string[] => {
+    const state = graph.state(kept);
+    return 'value' in state ? state.value.map(({ stored }) => stored.title) : [];
+  };
+  const duplicate = async ({ text }: StoredStudy): Promise<void> => {
+    const read = readStudy(text);
+    if (!read.ok) return;
+    await keep({ ...read.value, title: copyTitle(read.value.title, titles()) }, 'Not duplicated.');
   };
 
   page.mount(document.body, {
@@ -120,9 +142,34 @@ async function start(): Promise<void> {
     },
     hint: false,
     sections: [
-      page.section(1, 'Studies', 'Newest first, on this device only; nothing leaves it.', [
+      page.section(
+        1,
+        'A new study',
+        'One gap is enough for a first answer; unknown is allowed in the others.',
+        [
+          page.cell({
+            station: '1+010',
+            title: 'A new study',
+            shows: {},
+            body: newSentence({
+              titles,
+              begin: shelf && ((study) => void keepAndOpen(study, 'Not begun.')),
+            }),
+            notes: [
+              h('p', {}, 'Type, use the arrow keys, or leave a gap: a question mark makes it unknown again.'),
+              h(
+                'p',
+                {},
+                'What a gap leaves open stays unknown, or takes a usual value that is said below and in the study. All of it can be changed there.',
+              ),
+              h('p', { class: 'source' }, 'Usual values: common practice, no source.'),
+            ],
+          }),
+        ],
+      ),
+      page.section(2, 'Studies', 'Newest first, on this device only; nothing leaves it.', [
         page.cell({
-          station: '1+010',
+          station: '2+010',
           title: 'Studies on this device',
           shows: { kept, removed },
           owns: [kept, removed],
@@ -134,6 +181,7 @@ async function start(): Promise<void> {
               removed: v.removed,
               now: new Date(),
               widthPx: room.widthPx,
+              duplicate: (one) => void after(duplicate(one), null),
               remove: (one) => void after(cupboard!.remove(one.id), one),
               putBack: (one) =>
                 void after(
@@ -151,12 +199,12 @@ async function start(): Promise<void> {
         }),
       ]),
       page.section(
-        2,
+        3,
         'Worked examples',
         'Complete and invented; the first change makes one a study of your own.',
         exampleNames.map((name, at) =>
           page.cell({
-            station: `2+0${at + 1}0`,
+            station: `3+0${at + 1}0`,
             title: workedExample(name).title,
             shows: {},
             body: (_, room) => exampleCell(name, room.widthPx),
@@ -164,9 +212,9 @@ async function start(): Promise<void> {
           }),
         ),
       ),
-      page.section(3, 'What it is for, and what it is not', null, [
+      page.section(4, 'What it is for, and what it is not', null, [
         page.cell({
-          station: '3+010',
+          station: '4+010',
           title: 'What it is for',
           shows: {},
           body: [
@@ -199,7 +247,7 @@ async function start(): Promise<void> {
           ],
         }),
         page.cell({
-          station: '3+020',
+          station: '4+020',
           title: 'Cautions',
           shows: {},
           body: h(

@@ -19,6 +19,7 @@ export interface StudyListSpec {
   readonly removed: StoredStudy | null;
   readonly now: Date;
   readonly widthPx: number;
+  readonly duplicate: (study: StoredStudy) => void;
   readonly remove: (study: StoredStudy) => void;
   readonly putBack: (study: StoredStudy) => void;
 }
@@ -54,6 +55,7 @@ function row({ stored, read }: KeptStudy, index: number, spec: StudyListSpec): H
     h(
       'span',
       { class: 'doings' },
+      read.ok && action('Duplicate', `Duplicate ${title}`, () => spec.duplicate(stored)),
       action('Save as file', `Save ${title} as a file`, () => saveFile(fileName(stored), text)),
       action('Remove', `Remove ${title} from this device`, () => spec.remove(stored)),
     ),
@@ -75,7 +77,7 @@ export function studyList(spec: StudyListSpec): HtmlChild {
       ? h(
           'p',
           { class: 'prose' },
-          'No study lies here yet. A worked example becomes yours with the first change to it.',
+          'No study lies here yet. The sentence above begins one; a worked example becomes yours with the first change to it.',
         )
       : [
           h(

@@ -34,12 +34,37 @@ describe('shelf', () => {
     const { page, heard } = await site.open('index.html');
     await page.getByText('No study lies here yet').waitFor();
     expect(await page.locator('.answer').innerText()).toMatch(/^No study lies on this device yet/u);
-    const scale = page.locator('[id="2+010"] .elevation');
+    const scale = page.locator('[id="3+010"] .elevation');
     expect(await scale.getAttribute('data-scale')).toBe('2500');
     expect(await page.locator('body').innerText()).toContain('not for construction');
     expect(await page.getByRole('link', { name: 'open a worked example' }).getAttribute('href')).toBe(
       './option-study.html',
     );
+    silent(heard);
+  });
+
+  it('begins a study from its length alone, ranks it, and keeps it under its own name beside its duplicate', async () => {
+    const { page, heard } = await site.open('index.html');
+    const begin = page.getByRole('button', { name: 'Work it out' });
+    await page.getByText('gap 4, the length between the abutments').waitFor();
+    expect(await begin.isDisabled()).toBe(true);
+    await page.getByRole('textbox', { name: 'name of the crossing' }).fill('Kelder crossing');
+    await page.getByRole('spinbutton', { name: 'length between the abutments' }).fill('48');
+    await page.keyboard.press('Enter');
+    await page.getByText('Taken until it is known').waitFor();
+    await page.locator('.new-study .elevation').waitFor();
+    await begin.click();
+    await page.waitForURL(/option-study\.html\?study=/u);
+    await settled(page);
+    expect(await page.locator('h1').textContent()).toBe('Kelder crossing');
+    expect(await page.locator('.answer').innerText()).toMatch(/^Option \d+, .* comes out at /u);
+    expect(await page.locator('[data-option]').count()).toBeGreaterThan(2);
+    expect(await page.locator('[id="1+010"]').innerText()).toContain('Taken at the start');
+
+    await page.goto(new URL('index.html', site.address).href);
+    await page.getByRole('button', { name: 'Duplicate Kelder crossing' }).click();
+    await page.waitForFunction(() => document.querySelectorAll('.study').length === 2);
+    expect(await rows(page)).toEqual(['Kelder crossing, copy', 'Kelder crossing']);
     silent(heard);
   });
 
