@@ -4,6 +4,7 @@ import { formLooks } from '../forms/formLook.ts';
 import { fixed, listed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { StudyStore } from '../page/index.ts';
+import { formAction, formsNotAsked } from './formsTable.ts';
 
 /** How many arrangements were dropped without being worked out. */
 export const droppedTotal = ({ droppedCounts }: Appraisal): number =>
@@ -98,6 +99,15 @@ export function droppedTable(appraisal: Appraisal, store: StudyStore): HTMLEleme
                 ? ['form dropped', isOut(form) && [' ', anywayAction(store, form, false)]]
                 : fixed(count, 0),
             ),
+          ),
+        ),
+        formsNotAsked(store.valid()).map((form) =>
+          h(
+            'tr',
+            {},
+            h('th', { scope: 'row' }, formLooks[form].short),
+            h('td', { class: 'text' }, 'not asked for'),
+            h('td', {}, 'form not worked out ', formAction(store, form, false)),
           ),
         ),
       ),

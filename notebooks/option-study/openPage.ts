@@ -12,6 +12,7 @@ import { workedExample } from '../examples.ts';
 import { h } from '../html.ts';
 import {
   deviceCupboard,
+  fieldsOf,
   fileName,
   isOf,
   journal,
@@ -36,6 +37,7 @@ import { answeredFirst } from '../worked/answeredFirst.ts';
 import { readAnswer } from '../worked/answerText.ts';
 import { appraiser } from '../worker/index.ts';
 import { arrangementSection } from './arrangementSection.ts';
+import { problemBeside } from './brief/problemBeside.ts';
 import { briefSection } from './briefSection.ts';
 import { costSection } from './costSection.ts';
 import { depthSection } from './depthSection.ts';
@@ -149,6 +151,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
   undoKeys(store);
 
   const { head, brief, books } = store.slices;
+  const { words } = fieldsOf(graph, store, problemBeside);
   const element = page.mount(document.body, {
     bar: {
       pages: pagesFrom('option-study'),
@@ -163,11 +166,11 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
       ],
     },
     head: {
-      title: page.live({ head }, (v) => v.head.title),
+      title: words(['title'], { label: 'title of the study', most: 500 }),
       answer: page.live({ appraisal: cells.appraisal }, (v) => answerWords(v.appraisal)),
       next: page.live({ brief }, (v) => nextWords(v.brief)),
       block: [
-        ['Study', page.live({ head }, (v) => v.head.reference)],
+        ['Study', words(['reference'], { label: 'reference of the study', most: 60 })],
         ['Prices', page.live({ brief, books }, (v) => `${pricesWords(v)}, demo rates`)],
         ['Loading', page.live({ brief }, (v) => standardNames[v.brief.loading])],
         ['Levels', 'm above local datum'],
@@ -185,7 +188,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
     },
     sections: [
       briefSection(page, graph, store, cells),
-      spanSection(page, cells),
+      spanSection(page, store, cells),
       arrangementSection(page, graph, store, cells),
       depthSection(page, cells),
       sectionSection(page, cells),
@@ -197,7 +200,9 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
     ],
   });
   studyWhereFrom(graph, cells, element);
-  document.title = `${study.title} · Spanledger`;
+  graph.watch(head, (state) => {
+    if (state.state === 'ready') document.title = `${state.value.title} · Spanledger`;
+  });
 
   const setReadOnly = readOnly(element);
   let addressed: string | null = null;

@@ -5,7 +5,8 @@ import { spanRows } from '../charts/spanRows.ts';
 import { tableBehind } from '../charts/table.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
-import type { LineSection, Sheet } from '../page/index.ts';
+import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
+import { askedWords, formsTable, unsizedWords } from './formsTable.ts';
 import type { StudyCells } from './studyCells.ts';
 
 const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartInput => ({
@@ -20,7 +21,7 @@ const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartI
 const ROUND_CHART_PX = 110;
 
 /** Section 2: every form against the span that the barred stretch asks for. */
-export function spanSection(page: Sheet, cells: StudyCells): LineSection {
+export function spanSection(page: Sheet, store: StudyStore, cells: StudyCells): LineSection {
   const { spanning, site } = cells;
   const finding = page.live({ spanning }, (v) => {
     if (!v.spanning) return 'Nothing is barred: the span is free.';
@@ -65,6 +66,26 @@ export function spanSection(page: Sheet, cells: StudyCells): LineSection {
           'p',
           { class: 'source' },
           'Handbook tables, some read, some from memory: each rule names its own. Grey: US National Bridge Inventory 2024, bridges of 152 m and more built since 1980, read; dotted where fewer than 20 were built.',
+        ),
+      ],
+    }),
+    page.cell({
+      station: '2+020',
+      title: 'Forms asked for',
+      shows: { options: store.slices.options },
+      body: () => {
+        const study = store.valid();
+        return [
+          h('p', { class: 'prose' }, askedWords(study)),
+          formsTable(study, store),
+          h('p', { class: 'small' }, unsizedWords()),
+        ];
+      },
+      notes: [
+        h(
+          'p',
+          {},
+          'What is asked for is arranged, sized and priced, unless a rule puts it out. What is not asked for is listed among what was dropped.',
         ),
       ],
     }),

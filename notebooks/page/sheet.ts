@@ -264,7 +264,11 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
         ...sections.map((section) => section.element),
         lines.upright,
       );
-      const heading = (): string => element.querySelector('h1')?.textContent ?? '';
+      /** The title, of one that is changed in place without what is said beside it. */
+      const heading = (): string => {
+        const title = element.querySelector('h1');
+        return (title?.querySelector('.fig') ?? title)?.textContent ?? '';
+      };
       for (const host of hosts()) {
         const { element: cell } = host;
         cell.querySelector(':scope > .body')?.after(drawingActions(cell, heading, onFullSheet(host)));

@@ -82,6 +82,49 @@ describe('option study', () => {
     expect(await page.locator('#s2').textContent()).toContain('73 m asks');
   });
 
+  it('title and reference are changed where they stand; the tab, the file and undo follow', async () => {
+    const { page } = study;
+    const rename = async (name: string, words: string): Promise<void> => {
+      await page.getByRole('textbox', { name }).fill(words);
+      await page.keyboard.press('Enter');
+    };
+    await rename('title of the study', 'Wend bridge, option B');
+    await rename('reference of the study', 'WEN 08');
+    await page.waitForFunction(() => document.title === 'Wend bridge, option B · Spanledger');
+    const saving = page.waitForEvent('download');
+    await page.getByRole('button', { name: 'Save as file' }).click();
+    expect((await saving).suggestedFilename()).toBe('wen-08-wend-bridge-option-b.spanledger.json');
+
+    await rename('title of the study', ' ');
+    await page.locator('h1 .refusal', { hasText: 'The last valid study is kept' }).waitFor();
+    expect(await page.title()).toBe('Wend bridge, option B · Spanledger');
+    await page.getByRole('button', { name: "Back to 'Wend bridge, option B'" }).click();
+    await page.waitForFunction(
+      () => document.querySelector('h1 .fig')?.textContent === 'Wend bridge, option B',
+    );
+    expect(await page.locator('h1').textContent()).toBe('Wend bridge, option B');
+  });
+
+  it('a form is asked for and left out again; what is not asked for is listed as dropped', async () => {
+    const { page } = study;
+    const cell = page.locator('[id="2+020"]');
+    const dropped = page.locator('[id="3+020"], [id="3+010"]').locator('tr', { hasText: 'not asked for' });
+    const before = await dropped.count();
+    expect(before).toBeGreaterThan(0);
+    await cell.getByRole('button', { name: 'Composite box: ask for it' }).click();
+    await cell.getByRole('button', { name: 'Composite box: leave it out' }).waitFor();
+    await page
+      .locator('.ranking tbody tr', { hasText: 'Composite box' })
+      .first()
+      .waitFor({ state: 'attached' });
+    await settled(page);
+    expect(await dropped.count()).toBe(before - 1);
+    await cell.getByRole('button', { name: 'Composite box: leave it out' }).click();
+    await page.waitForFunction(
+      () => !document.querySelector('.ranking tbody')?.textContent.includes('Composite box'),
+    );
+  });
+
   it('a click on an elevation makes it the reference everywhere', async () => {
     const { page } = study;
     const row = page.locator('[data-option]').nth(3);
