@@ -97,6 +97,9 @@ export const spansText = (spansM: readonly number[]): string =>
 export const spansPhrase = (spansM: readonly number[]): string =>
   `${spansM.length > LISTED_SPANS ? '' : 'spans '}${spansText(spansM)}`;
 
+/** Words at the start of a sentence. */
+export const capitalised = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
+
 /** A list in words: 'a, b and c'. */
 export function listed(words: readonly string[]): string {
   if (words.length < 2) return words.join('');

@@ -1,4 +1,4 @@
-import { significant, use } from '../format.ts';
+import { capitalised, significant, use } from '../format.ts';
 import type { Asked } from '../drawing/asked.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
@@ -28,8 +28,6 @@ const ofCheck = (
   field: 'demand' | 'capacity' | 'utilisation',
 ): Asked => (design === undefined ? undefined : `${design}/checks/${check.id}/${field}`);
 
-const sentence = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
-
 /** Utilisation of each check as a line under its name, against the limit of 1.00; the highest is bold. */
 export function checkBars(input: CheckBarsInput): Piece {
   const { form, checks, widthPx } = input;
@@ -43,7 +41,7 @@ export function checkBars(input: CheckBarsInput): Piece {
     return {
       check,
       governs,
-      lines: wrapText(sentence(check.label), x(1) - 8, letters.table, governs ? 600 : 400),
+      lines: wrapText(capitalised(check.label), x(1) - 8, letters.table, governs ? 600 : 400),
     };
   });
   let bottom = 6;

@@ -20,10 +20,10 @@ export function formsNotAsked(study: Study): FormId[] {
   return formIds.filter((form) => sizeableForms.includes(form) && !asked.includes(form));
 }
 
-/** What asks for a form or leaves it out. */
+/** What asks for a form or leaves it out; it can be seen without pointing at its row. */
 export function formAction(store: StudyStore, form: FormId, isAsked: boolean): HTMLElement {
   const words = isAsked ? 'leave it out' : 'ask for it';
-  return h(
+  const button = h(
     'button',
     {
       type: 'button',
@@ -37,6 +37,7 @@ export function formAction(store: StudyStore, form: FormId, isAsked: boolean): H
     },
     words,
   );
+  return h('span', {}, button);
 }
 
 /** 'All seventeen forms are asked for.' or how many are, and which are not. */
@@ -52,7 +53,7 @@ export function unsizedWords(): string {
   const unsized = formIds.filter((form) => !sizeableForms.includes(form));
   if (unsized.length === 0) return '';
   const they = unsized.length === 1 ? 'it is' : 'they are';
-  return `Not worked out by this tool and so not to be asked for: ${listed(unsized.map((form) => formLooks[form].short))}. At 2+010 ${they} judged by span alone.`;
+  return `Not worked out by this tool and so not to be asked for: ${listed(unsized.map((form) => formLooks[form].short.toLowerCase()))}. At 2+010 ${they} judged by span alone.`;
 }
 
 /** Every form, whether the study asks for it, and the way to ask for it or leave it out. */

@@ -2,7 +2,7 @@ import type { Appraisal, AppraisedOption, Brief, Site, Spread, Study } from '../
 import { spanPaths, spansOf } from '../drawing/alongOption.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
-import { fixed, listed, money2, moneyUnit, odds, spansText } from '../format.ts';
+import { capitalised, fixed, listed, money2, moneyUnit, odds, spansText } from '../format.ts';
 import type { HtmlChild } from '../html.ts';
 import { workedFigure } from '../page/index.ts';
 
@@ -61,7 +61,7 @@ export function answerWords({ options, standing, currency }: Appraisal): HtmlChi
     ];
   }
   const said = listed(rivals.map((option) => `option ${option.number} (${titleInside(option)})`));
-  return [first, ` ${said.charAt(0).toUpperCase()}${said.slice(1)} cannot be separated from it on cost.`];
+  return [first, ` ${capitalised(said)} cannot be separated from it on cost.`];
 }
 
 /** The title of an option inside a sentence. */
@@ -88,9 +88,5 @@ export function crossingWords(site: Site): HtmlChild {
   const plain = site.soffitLimits.some((limit) => limit.kind === 'flood') ? ['a flood plain'] : [];
   const all = [...names, ...plain];
   const said = all.length > 0 ? listed(all) : 'open ground';
-  return [
-    `${said.charAt(0).toUpperCase()}${said.slice(1)} in `,
-    workedFigure('site/lengthM', fixed(site.lengthM, 0)),
-    ' m.',
-  ];
+  return [`${capitalised(said)} in `, workedFigure('site/lengthM', fixed(site.lengthM, 0)), ' m.'];
 }

@@ -4,7 +4,7 @@ import { largestScale } from '../drawing/scale.ts';
 import { sheet as drawingSheet } from '../drawing/sheet.ts';
 import { exampleNames, type ExampleName } from '../exampleNames.ts';
 import { workedExample } from '../examples.ts';
-import { countWords, fixed, listed } from '../format.ts';
+import { capitalised, countWords, fixed, listed } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import {
   deviceCupboard,
@@ -43,13 +43,13 @@ function exampleCell(name: ExampleName, widthPx: number): HTMLElement {
 function exampleWords({ zones, lengthM, mainOpening }: Site): string {
   const kinds = listed([...new Set(zones.map(({ kind }) => `a ${kind}`))]);
   const barred = mainOpening === null ? '' : `; no pier may stand in ${fixed(mainOpening.widthM, 0)} m of it`;
-  return `${kinds.charAt(0).toUpperCase()}${kinds.slice(1)} in ${fixed(lengthM, 0)} m${barred}.`;
+  return `${capitalised(kinds)} in ${fixed(lengthM, 0)} m${barred}.`;
 }
 
 const answerWords = (kept: readonly KeptStudy[]): string => {
   const count = countWords(kept.length);
   const lie = kept.length === 0 ? 'yet' : 'and nowhere else';
-  return `${count.charAt(0).toUpperCase()}${count.slice(1)} ${kept.length < 2 ? 'study lies' : 'studies lie'} on this device ${lie}. For a new crossing, fill the sentence below; worked examples show what comes out: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.`;
+  return `${capitalised(count)} ${kept.length < 2 ? 'study lies' : 'studies lie'} on this device ${lie}. For a new crossing, fill the sentence below; worked examples show what comes out: from a crossing and a budget to ranked forms, spans, depths, quantities and cost with honest ranges, and the reasons.`;
 };
 
 function nextWords(kept: readonly KeptStudy[]): HtmlChild {

@@ -8,10 +8,8 @@ import {
   type Status,
 } from '../../lib/index.ts';
 import { flipWords } from '../charts/spanRows.ts';
-import { countWords, fixed, listed, plain } from '../format.ts';
+import { capitalised, countWords, fixed, listed, plain } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
-
-const capital = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
 
 /** A form's name inside a sentence: 'composite I'. */
 const inText = (form: FormId): string => {
@@ -28,8 +26,8 @@ export function answerWords(guide: Guide): string {
   const possible = namesOf(guide, 'possible').length;
   const out = namesOf(guide, 'out').length;
   const rest = `${countWords(possible)} more ${possible === 1 ? 'is' : 'are'} possible, ${countWords(out)} ${out === 1 ? 'is' : 'are'} out.`;
-  if (inside.length === 0) return capital(`no form is in; ${rest}`);
-  return `${capital(listed(inside))} ${inside.length === 1 ? 'is' : 'are'} in; ${rest}`;
+  if (inside.length === 0) return capitalised(`no form is in; ${rest}`);
+  return `${capitalised(listed(inside))} ${inside.length === 1 ? 'is' : 'are'} in; ${rest}`;
 }
 
 /** What changes first when the span does. */

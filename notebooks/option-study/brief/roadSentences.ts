@@ -1,4 +1,5 @@
 import type { Road, Study } from '../../../lib/index.ts';
+import { capitalised } from '../../format.ts';
 import type { HtmlChild } from '../../html.ts';
 import { putAt, type Made, type Path } from '../../page/index.ts';
 import { approachSideChoices, fixedEndChoices, loadingChoices, tieInChoices } from './briefChoices.ts';
@@ -10,7 +11,7 @@ export function waterSentence({ fields, height }: InWords, { brief }: Study, ind
   const at = (key: string): Path => ['brief', 'waters', index, key];
   const isKnown = water.floodLevelM !== 'unknown';
   return [
-    place(water.name),
+    place(capitalised(water.name)),
     ' stands at ',
     height(at('levelM'), 'water level'),
     ' and floods to ',
