@@ -167,7 +167,12 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
     },
     head: {
       title: words(['title'], { label: 'title of the study', most: 500 }),
-      answer: page.live({ appraisal: cells.appraisal }, (v) => answerWords(v.appraisal)),
+      // A worked example comes with its answer; a study of one's own takes some seconds.
+      answer: page.live(
+        { appraisal: cells.appraisal },
+        (v) => answerWords(v.appraisal),
+        coming === null ? 'The options are being worked out. The brief can be changed meanwhile.' : undefined,
+      ),
       next: page.live({ brief }, (v) => nextWords(v.brief)),
       block: [
         ['Study', words(['reference'], { label: 'reference of the study', most: 60 })],

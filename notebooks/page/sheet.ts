@@ -55,8 +55,15 @@ export interface SheetOptions {
 
 /** The page of a notebook: builders for its parts, all tied to one graph. */
 export interface Sheet {
-  /** A run of text or a part of a page that follows the values of cells; for titles, answers, findings. */
-  readonly live: <const U extends Uses>(uses: U, show: (values: Values<U>) => HtmlChild) => HTMLElement;
+  /**
+   * A run of text or a part of a page that follows the values of cells; for titles, answers, findings.
+   * @param meanwhile what it says until the first values come
+   */
+  readonly live: <const U extends Uses>(
+    uses: U,
+    show: (values: Values<U>) => HtmlChild,
+    meanwhile?: string,
+  ) => HTMLElement;
   readonly cell: <const U extends Uses>(spec: CellSpec<U>) => CellHost;
   readonly section: (
     number: number,
@@ -200,8 +207,8 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
     };
 
   return {
-    live(uses, show) {
-      const part = h('span', { class: 'live' });
+    live(uses, show, meanwhile) {
+      const part = h('span', { class: 'live' }, meanwhile);
       let state: State<Values<typeof uses>> = { state: 'pending' };
       let shown: unknown;
       /** Whether it is on the screen or about to be: elsewhere it rests like a drawing. */
@@ -212,6 +219,7 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
       const draw = (): void => {
         rests.drop(draw);
         part.classList.toggle('pending', state.state === 'failed' || late.isLate());
+        if (state.state === 'failed' && shown === undefined) part.replaceChildren();
         if (!('value' in state) || state.value === shown) return;
         shown = exchange(part, h('span', {}, show(state.value))) ? state.value : undefined;
       };

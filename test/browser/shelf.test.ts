@@ -55,6 +55,7 @@ describe('shelf', () => {
     await page.locator('.new-study .elevation').waitFor();
     await begin.click();
     await page.waitForURL(/option-study\.html\?study=/u);
+    await page.locator('.answer', { hasText: 'are being worked out' }).waitFor();
     await settled(page);
     expect(await page.locator('h1').textContent()).toBe('Kelder crossing');
     expect(await page.locator('.answer').innerText()).toMatch(/^Option \d+, .* comes out at /u);
