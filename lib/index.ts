@@ -52,5 +52,13 @@ export {
   survey,
   waterDepthAt,
 } from './site/index.ts';
-export { fillGround, fingerprint, groundLabels, parseStudy, readStudy, writeStudy } from './study/index.ts';
+export {
+  fillGround,
+  fingerprint,
+  groundLabels,
+  parseStudy,
+  readDraft,
+  readStudy,
+  writeStudy,
+} from './study/index.ts';
 export { items } from './takeoff/index.ts';

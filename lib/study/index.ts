@@ -1,4 +1,4 @@
 export { fillGround, groundLabels } from './fillGround.ts';
-export { parseStudy, readStudy } from './readStudy.ts';
+export { parseStudy, readDraft, readStudy } from './readStudy.ts';
 export { studySchema, studyVersion } from './schema.ts';
 export { fingerprint, writeStudy } from './writeStudy.ts';

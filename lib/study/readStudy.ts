@@ -4,7 +4,7 @@ import { migrate } from './migrate.ts';
 import { problem } from './problem.ts';
 import { safeJson } from './safeJson.ts';
 import { studySchema, studyVersion } from './schema.ts';
-import { schemaProblems } from './schemaProblems.ts';
+import { schemaProblems, valueAt } from './schemaProblems.ts';
 import { shown } from './shown.ts';
 
 function headProblem(raw: Record<string, unknown>): Problem | null {
@@ -45,4 +45,40 @@ export function parseStudy(value: unknown): Result<Study> {
 export function readStudy(text: string): Result<Study> {
   const json = safeJson(text);
   return json.ok ? parseStudy(json.value) : json;
+}
+
+const isEntry = (value: unknown): boolean => typeof value === 'number' || typeof value === 'string';
+
+/** Plain data with another entry at a path that leads to one. */
+function withEntry<T>(root: T, path: readonly (string | number)[], value: unknown): T {
+  const [key, ...rest] = path;
+  if (key === undefined) return value as T;
+  const part = withEntry((root as Record<string | number, unknown>)[key], rest, value);
+  if (Array.isArray(root)) return root.map((one: unknown, i) => (i === key ? part : one)) as T;
+  return { ...root, [key]: part };
+}
+
+/**
+ * Text of a study as it was typed, which need not be valid: its shape is that of a study, single entries may lie outside
+ * what is allowed and several may contradict each other. `valid` is the study it was typed over: its entries hold the
+ * places of refused ones while the shape is read. Null where the shape cannot be read. Never throws.
+ */
+export function readDraft(text: string, valid: Study): Study | null {
+  const json = safeJson(text);
+  if (!json.ok || typeof json.value !== 'object' || json.value === null) return null;
+  const raw = json.value as Record<string, unknown>;
+  if (headProblem(raw) !== null) return null;
+  const current = migrate(raw, raw['version'] as number, studyVersion);
+  const parsed = studySchema.safeParse(current);
+  if (parsed.success) return parsed.data;
+  const faults = schemaProblems(parsed.error.issues, current).map(({ path }) => ({
+    path,
+    typed: valueAt(current, path),
+    good: valueAt(valid, path),
+  }));
+  if (!faults.every(({ typed, good }) => isEntry(typed) && isEntry(good))) return null;
+  const shape = faults.reduce((study, { path, good }) => withEntry(study, path, good), current);
+  const read = studySchema.safeParse(shape);
+  if (!read.success) return null;
+  return faults.reduce<Study>((study, { path, typed }) => withEntry(study, path, typed), read.data);
 }

@@ -21,7 +21,8 @@ function keysOf(path: readonly PropertyKey[]): Path {
   return path.map((key) => (typeof key === 'symbol' ? key.toString() : key));
 }
 
-function valueAt(root: unknown, path: Path): unknown {
+/** What stands at a path of plain data; undefined where it leads nowhere. */
+export function valueAt(root: unknown, path: readonly (string | number)[]): unknown {
   let value = root;
   for (const key of path) {
     if (typeof value !== 'object' || value === null || !Object.hasOwn(value, key)) return undefined;

@@ -1,5 +1,6 @@
 import {
   choiceProblems,
+  readDraft,
   readStudy,
   sentence,
   standardNames,
@@ -21,6 +22,7 @@ import {
   pagesFrom,
   printUpright,
   readOnly,
+  readTyped,
   saveFile,
   savedWords,
   sheet,
@@ -30,7 +32,9 @@ import {
   whileDragged,
   type Journal,
   type Keeping,
+  type StudyFormat,
   type StudyShelf,
+  type TypedStudy,
 } from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
 import { answeredFirst } from '../worked/answeredFirst.ts';
@@ -59,12 +63,13 @@ function check(study: Study, before: Study): readonly Problem[] {
   return read.ok ? choiceProblems(study, before) : read.problems;
 }
 
+const format: StudyFormat = { readStudy, readDraft, writeStudy };
+
 const query = new URLSearchParams(location.search);
 
 /** A study as a page begins with it. */
-interface Opened {
+interface Opened extends TypedStudy {
   readonly id: string;
-  readonly study: Study;
   readonly revision: number;
   readonly problem: string;
   /** What was changed last time had not been saved when the page was closed. */
@@ -75,14 +80,14 @@ interface Opened {
 async function opened(shelf: StudyShelf | null, waiting: Journal): Promise<Opened> {
   const id = query.get('study');
   const study = workedExample(exampleNamed(query.get('example')));
-  const anew = { id: crypto.randomUUID(), study, revision: 0, problem: '', isUnsaved: false };
+  const anew = { id: crypto.randomUUID(), study, draft: null, revision: 0, problem: '', isUnsaved: false };
   if (id === null || shelf === null) return { ...anew, ...(id !== null && { id }) };
   const loaded = await shelf.load(id);
   const unsaved = waiting.get(id);
   const revision = loaded.ok ? loaded.value.revision : 0;
   if (unsaved !== undefined && isOf(unsaved, revision)) {
-    const read = readStudy(unsaved.text);
-    if (read.ok) return { ...anew, id, study: read.value, revision, isUnsaved: true };
+    const read = readTyped(format, unsaved);
+    if (read.ok) return { ...anew, id, ...read.value, revision, isUnsaved: true };
   }
   if (loaded.ok) return { ...anew, id, ...loaded.value };
   return {
@@ -107,22 +112,38 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
   // The hand has both processors to itself.
   whileDragged(workers.hold);
   const cupboard = await deviceCupboard().catch(() => null);
-  const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
+  const shelf = cupboard && studyShelf(cupboard, format, () => new Date());
   const unsaved = journal(localStorage);
-  const { study, problem, id, revision, isUnsaved } = await opened(shelf, unsaved);
+  const { study, draft, problem, id, revision, isUnsaved } = await opened(shelf, unsaved);
   let kept: Keeping | null = null;
 
   const graph = newGraph();
   const store = studyStore(graph, study, check, () => kept?.mayChange() ?? true);
+  if (draft !== null) store.open(study, draft);
   const cells = studyCells(graph, store, workers);
   const page = sheet(graph, { aside: [cells.byDepth, cells.spanning] });
 
   const saved = h('span', { class: 'state', role: 'status' }, problem);
   const button = (words: string, act: () => void): HTMLElement =>
     h('button', { type: 'button', class: 'action', onclick: act }, words);
-  const whole = (): Study => {
+  /** A study with the numbers that its options have been given meanwhile. */
+  const numbered = (one: Study): Study => ({
+    ...one,
+    options: { ...one.options, register: cells.register() },
+  });
+  const typed = (): TypedStudy => {
+    const state = graph.state(store.draft);
     const valid = store.valid();
-    return { ...valid, options: { ...valid.options, register: cells.register() } };
+    const isFaulty = state.state === 'ready' && state.value !== valid;
+    return { study: numbered(valid), draft: isFaulty ? numbered(state.value) : null };
+  };
+  /** A file is for others: it holds the last valid study, and says so where that is not the one on the page. */
+  const saveAsFile = (): void => {
+    const { study: whole, draft: faulty } = typed();
+    saveFile(fileName(whole), writeStudy(whole));
+    if (faulty !== null)
+      saved.textContent =
+        'The file holds the study as it was before the entry that is refused: nothing typed since is in it. Mend that entry and save the file again.';
   };
   const openStudy = async (): Promise<void> => {
     const text = await openFile();
@@ -160,7 +181,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
         undo,
         redo,
         button('Open', () => void openStudy()),
-        button('Save as file', () => saveFile(fileName(whole()), writeStudy(whole()))),
+        button('Save as file', saveAsFile),
         button('Print', () => print()),
         button('Print upright', printUpright),
       ],
@@ -223,11 +244,11 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
       revision,
       shelf,
       journal: unsaved,
-      format: { readStudy, writeStudy },
+      format,
       locks: navigator.locks,
-      study: whole,
-      show: store.open,
-      saved: (savedAt) => (saved.textContent = savedWords(savedAt)),
+      study: typed,
+      show: (shown) => store.open(shown.study, shown.draft ?? undefined),
+      saved: (savedAt, isFaulty) => (saved.textContent = savedWords(savedAt, isFaulty)),
       refused: (problems) => (saved.textContent = problems.map(sentence).join(' ')),
       owned(isMine) {
         setReadOnly(!isMine);

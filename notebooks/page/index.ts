@@ -30,6 +30,7 @@ export { waysOn, type Way } from './refusal.ts';
 export { getAt, isWithin, putAt, type Path } from './place.ts';
 export { share } from './share.ts';
 export {
+  readTyped,
   fileName,
   savedWords,
   studyShelf,
@@ -39,6 +40,7 @@ export {
   type StudyEntry,
   type StudyFormat,
   type StudyShelf,
+  type TypedStudy,
 } from './saving.ts';
 export { deviceCupboard } from './cupboard.ts';
 export { isOf, journal, type Journal, type Unsaved } from './journal.ts';

@@ -1,6 +1,9 @@
 /** A study as it stood at the last change, until it has been saved. */
 export interface Unsaved {
+  /** The last valid study. */
   readonly text: string;
+  /** The study as typed, while something is wrong with it. */
+  readonly draft?: string;
   /** Revision of the stored study it was changed from; 0 for one that has never been saved. */
   readonly revision: number;
 }
@@ -37,7 +40,9 @@ export function journal(storage: Pick<Storage, 'getItem' | 'setItem' | 'removeIt
         if (typeof read !== 'object' || read === null || !('text' in read) || !('revision' in read))
           return undefined;
         const { text, revision } = read;
-        return typeof text === 'string' && typeof revision === 'number' ? { text, revision } : undefined;
+        if (typeof text !== 'string' || typeof revision !== 'number') return undefined;
+        const draft = 'draft' in read && typeof read.draft === 'string' && { draft: read.draft };
+        return { text, revision, ...draft };
       } catch {
         return undefined;
       }

@@ -1,8 +1,8 @@
-import type { Problem, Study } from '../../lib/index.ts';
+import type { Problem } from '../../lib/index.ts';
 import { isDragging } from './dragging.ts';
 import { isOf, type Journal } from './journal.ts';
 import { ownership, type Ownership } from './ownership.ts';
-import type { StudyFormat, StudyShelf } from './saving.ts';
+import { readTyped, writeTyped, type StudyFormat, type StudyShelf, type TypedStudy } from './saving.ts';
 
 /** The study of a page as it is kept on the device: saved as it is typed, and changed by one tab at a time. */
 export interface Keeping {
@@ -24,10 +24,10 @@ export interface KeepingSpec {
   readonly format: StudyFormat;
   readonly locks: LockManager | undefined;
   /** The study as it is to be saved. */
-  readonly study: () => Study;
+  readonly study: () => TypedStudy;
   /** Shows a study that another tab has changed meanwhile. */
-  readonly show: (study: Study) => void;
-  readonly saved: (savedAt: string) => void;
+  readonly show: (typed: TypedStudy) => void;
+  readonly saved: (savedAt: string, isFaulty: boolean) => void;
   readonly refused: (problems: readonly Problem[]) => void;
   /** Says whether this tab may change the study. */
   readonly owned: (isMine: boolean) => void;
@@ -55,14 +55,15 @@ export function keeping(spec: KeepingSpec): Keeping {
   const write = (): void => {
     clearTimeout(writing);
     writing = undefined;
-    if (isDirty) journal.put(id, { text: format.writeStudy(spec.study()), revision });
+    if (isDirty) journal.put(id, { ...writeTyped(format, spec.study()), revision });
   };
   const saveNow = async (): Promise<void> => {
     clearTimeout(saving);
     if (!isDirty || !own.isMine()) return;
     isDirty = false;
     const mine = id;
-    const result = await shelf.save(mine, spec.study(), revision);
+    const typed = spec.study();
+    const result = await shelf.save(mine, typed, revision);
     if (mine !== id) return;
     if (!result.ok) {
       isDirty = true;
@@ -75,7 +76,7 @@ export function keeping(spec: KeepingSpec): Keeping {
     // What has changed while it was saved starts from this revision.
     if (hasChanged()) write();
     else journal.clear(mine);
-    spec.saved(result.value.savedAt);
+    spec.saved(result.value.savedAt, typed.draft !== null);
   };
   /** One saving after the other, also after one that failed. */
   const save = (): Promise<void> => (last = last.then(saveNow, saveNow));
@@ -92,11 +93,11 @@ export function keeping(spec: KeepingSpec): Keeping {
     const waits = journal.get(id);
     const loaded = await shelf.load(id);
     if (loaded.ok) revision = loaded.value.revision;
-    const unsaved = waits !== undefined && isOf(waits, revision) ? format.readStudy(waits.text) : null;
+    const unsaved = waits !== undefined && isOf(waits, revision) ? readTyped(format, waits) : null;
     if (unsaved?.ok === true) {
       spec.show(unsaved.value);
       isDirty = true;
-    } else if (loaded.ok) spec.show(loaded.value.study);
+    } else if (loaded.ok) spec.show(loaded.value);
   };
   const claim = (): void => {
     own = ownership(spec.locks, id, (how) => {

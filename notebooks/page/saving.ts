@@ -5,7 +5,10 @@ export interface StoredStudy {
   readonly id: string;
   readonly title: string;
   readonly reference: string;
+  /** The last valid study. */
   readonly text: string;
+  /** The study as typed, while something is wrong with it. */
+  readonly draft?: string;
   /** Moment of saving, ISO 8601. */
   readonly savedAt: string;
   /** Counts the times it was saved; tells whether somebody else saved it meanwhile. */
@@ -27,14 +30,41 @@ export interface StudyCupboard {
 /** The way in and the way out of a study file. */
 export interface StudyFormat {
   readonly readStudy: (text: string) => Result<Study>;
+  /** A study as typed over a valid one; null where it cannot be read. */
+  readonly readDraft: (text: string, valid: Study) => Study | null;
   readonly writeStudy: (study: Study) => string;
 }
 
-export type StudyEntry = Omit<StoredStudy, 'text'>;
+export type StudyEntry = Omit<StoredStudy, 'text' | 'draft'>;
+
+/** The last valid study, and the study as typed while something is wrong with it; null where nothing is. */
+export interface TypedStudy {
+  readonly study: Study;
+  readonly draft: Study | null;
+}
+
+/** A study as it was kept. Refused where the valid one cannot be read; a draft that cannot be is left out. */
+export function readTyped(
+  { readStudy, readDraft }: StudyFormat,
+  { text, draft }: Pick<StoredStudy, 'text' | 'draft'>,
+): Result<TypedStudy> {
+  const read = readStudy(text);
+  if (!read.ok) return read;
+  const study = read.value;
+  return { ok: true, value: { study, draft: draft === undefined ? null : readDraft(draft, study) } };
+}
+
+/** A study as it is to be kept, the way `readTyped` reads it. */
+export const writeTyped = (
+  { writeStudy }: StudyFormat,
+  { study, draft }: TypedStudy,
+): Pick<StoredStudy, 'text' | 'draft'> => ({
+  text: writeStudy(study),
+  ...(draft !== null && { draft: writeStudy(draft) }),
+});
 
 /** A study that was read, and the revision a later saving of it starts from. */
-export interface LoadedStudy {
-  readonly study: Study;
+export interface LoadedStudy extends TypedStudy {
   readonly revision: number;
 }
 
@@ -48,7 +78,7 @@ export interface StudyShelf {
    * written: a study that could not be read again, one that was saved elsewhere meanwhile, and any saving over a
    * stored study that is newer than this tool or damaged.
    */
-  readonly save: (id: string, study: Study, revision: number) => Promise<Result<StudyEntry>>;
+  readonly save: (id: string, typed: TypedStudy, revision: number) => Promise<Result<StudyEntry>>;
   readonly remove: (id: string) => Promise<void>;
 }
 
@@ -108,19 +138,20 @@ export function studyShelf(cupboard: StudyCupboard, format: StudyFormat, now: ()
         );
         return { ok: false, problems: [missing] };
       }
-      const read = format.readStudy(stored.text);
-      return read.ok ? { ok: true, value: { study: read.value, revision: stored.revision } } : read;
+      const read = readTyped(format, stored);
+      return read.ok ? { ok: true, value: { ...read.value, revision: stored.revision } } : read;
     },
 
-    async save(id, study, revision) {
-      const text = format.writeStudy(study);
-      const read = format.readStudy(text);
+    async save(id, typed, revision) {
+      const { study } = typed;
+      const texts = writeTyped(format, typed);
+      const read = format.readStudy(texts.text);
       if (!read.ok) return read;
       const mine: StoredStudy = {
         id,
         title: study.title,
         reference: study.reference,
-        text,
+        ...texts,
         savedAt: now().toISOString(),
         revision: revision + 1,
       };
@@ -141,8 +172,12 @@ const timeOf = (savedAt: string): string => {
   return [date.getHours(), date.getMinutes()].map((part) => String(part).padStart(2, '0')).join(':');
 };
 
-/** When a study was saved, in the time of the device: 'saved 14:02 on this device'. */
-export const savedWords = (savedAt: string): string => `saved ${timeOf(savedAt)} on this device`;
+/**
+ * When a study was saved, in the time of the device: 'saved 14:02 on this device'.
+ * @param isFaulty something in it is refused still
+ */
+export const savedWords = (savedAt: string, isFaulty = false): string =>
+  `saved ${timeOf(savedAt)} on this device${isFaulty ? ' as typed, with what is refused' : ''}`;
 
 /** Name of the file of a study: 'WEN 07 River Wend' -> 'wen-07-river-wend.spanledger.json'. */
 export function fileName(study: Pick<Study, 'title' | 'reference'>): string {

@@ -44,8 +44,11 @@ export interface StudyStore {
   readonly dropStep: () => void;
   readonly undo: () => void;
   readonly redo: () => void;
-  /** Puts another study in its place and forgets the history. Throws when it is not valid: check it first. */
-  readonly open: (study: Study) => void;
+  /**
+   * Puts another study in its place and forgets the history. Throws when it is not valid: check it first.
+   * @param typed the study as typed over it, with what is refused in it: the one step that can be undone
+   */
+  readonly open: (study: Study, typed?: Study) => void;
   /** The last valid study. */
   readonly valid: () => Study;
 }
@@ -197,13 +200,19 @@ export function studyStore(
       take(step.after);
     },
 
-    open(opened) {
+    open(opened, typed = opened) {
       checkOpening(opened);
       isOpen = false;
       done = [];
       undone = [];
       const next = share(draft, opened);
       take(next, next);
+      const over = share(next, typed);
+      if (over === next) return;
+      done = [
+        { before: next, after: over, key: undefined, what: 'what was typed since the last valid study' },
+      ];
+      take(over);
     },
 
     valid: () => valid,

@@ -1,4 +1,12 @@
-import { readStudy, sentence, survey, writeStudy, type Site, type Study } from '../../lib/index.ts';
+import {
+  readDraft,
+  readStudy,
+  sentence,
+  survey,
+  writeStudy,
+  type Site,
+  type Study,
+} from '../../lib/index.ts';
 import { scaleBar } from '../drawing/scaleBar.ts';
 import { largestScale } from '../drawing/scale.ts';
 import { sheet as drawingSheet } from '../drawing/sheet.ts';
@@ -92,11 +100,11 @@ async function start(): Promise<void> {
   const said = h('span', { class: 'state', role: 'status' });
   if (cupboard === null)
     said.textContent = 'This browser keeps no studies; open and save them as files in the option study.';
-  const shelf = cupboard && studyShelf(cupboard, { readStudy, writeStudy }, () => new Date());
+  const shelf = cupboard && studyShelf(cupboard, { readStudy, readDraft, writeStudy }, () => new Date());
   /** Puts a study on the device under an id of its own; says why where it cannot. */
   const keep = async (study: Study, refusedWith: string): Promise<string | null> => {
     const id = crypto.randomUUID();
-    const saved = await shelf!.save(id, study, 0);
+    const saved = await shelf!.save(id, { study, draft: null }, 0);
     if (saved.ok) return id;
     said.textContent = `${refusedWith} ${saved.problems.map(sentence).join(' ')}`;
     return null;

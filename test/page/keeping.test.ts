@@ -1,5 +1,5 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import { readStudy, writeStudy, type Study } from '../../lib/index.ts';
+import { readDraft, readStudy, writeStudy, type Study } from '../../lib/index.ts';
 import { journal } from '../../notebooks/page/journal.ts';
 import { keeping } from '../../notebooks/page/keeping.ts';
 import { studyShelf, type StoredStudy } from '../../notebooks/page/saving.ts';
@@ -49,25 +49,30 @@ function device() {
         },
         remove: (id) => Promise.resolve(void kept.delete(id)),
       },
-      { readStudy, writeStudy },
+      { readStudy, readDraft, writeStudy },
       () => new Date(0),
     ),
   };
 }
 
 /** Keeps the worked example and writes down what its page says. */
-function keep(study: Study, locks: LockManager, { shelf, unsaved }: ReturnType<typeof device>) {
+function keep(
+  study: Study,
+  locks: LockManager,
+  { shelf, unsaved }: ReturnType<typeof device>,
+  draft: Study | null = null,
+) {
   const said: string[] = [];
   const kept = keeping({
     id: 'one',
     revision: 0,
     shelf,
     journal: unsaved,
-    format: { readStudy, writeStudy },
+    format: { readStudy, readDraft, writeStudy },
     locks,
-    study: () => study,
+    study: () => ({ study, draft }),
     show: () => undefined,
-    saved: () => said.push('saved'),
+    saved: (_, isFaulty) => said.push(isFaulty ? 'saved with faults' : 'saved'),
     refused: (problems) => said.push(`refused ${problems.length}`),
     owned: (isMine) => said.push(isMine ? 'mine' : 'read only'),
   });
@@ -100,6 +105,25 @@ describe('keeping', () => {
     await vi.advanceTimersByTimeAsync(0);
     expect(said).toEqual(['mine', 'saved']);
     expect(where.kept.get('one')?.revision).toBe(1);
+  });
+
+  it('a study with something refused in it is written down and saved as typed, and says so', async () => {
+    const { locks, give } = locksByHand();
+    const where = device();
+    const study = lowFerry();
+    const draft = { ...study, title: '' };
+    const { kept, said } = keep(study, locks, where, draft);
+    give();
+    kept.changed();
+    await vi.advanceTimersByTimeAsync(200);
+    expect(where.unsaved.get('one')).toEqual({
+      text: writeStudy(study),
+      draft: writeStudy(draft),
+      revision: 0,
+    });
+    await vi.advanceTimersByTimeAsync(1000);
+    expect(said).toEqual(['mine', 'saved with faults']);
+    expect(where.kept.get('one')).toMatchObject({ text: writeStudy(study), draft: writeStudy(draft) });
   });
 
   it('a saving that ends after another tab has taken the study over says nothing', async () => {

@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import example from '../../data/examples/low-ferry.json' with { type: 'json' };
-import { parseStudy, readStudy, writeStudy } from '../../lib/index.ts';
+import { parseStudy, readDraft, readStudy, writeStudy } from '../../lib/index.ts';
 import type { Result, Study } from '../../lib/index.ts';
 import { fileName, savedWords, studyShelf } from '../../notebooks/page/saving.ts';
-import type { StoredStudy, StudyCupboard } from '../../notebooks/page/saving.ts';
+import type { StoredStudy, StudyCupboard, TypedStudy } from '../../notebooks/page/saving.ts';
 import { putAt } from '../../notebooks/page/place.ts';
 
 const lowFerry = (): Study => {
@@ -11,6 +11,8 @@ const lowFerry = (): Study => {
   if (!read.ok) throw new Error('the example is not valid');
   return read.value;
 };
+
+const typed = (study: Study, draft: Study | null = null): TypedStudy => ({ study, draft });
 
 /** A cupboard in memory that counts what is written. */
 function shelf() {
@@ -35,7 +37,7 @@ function shelf() {
   };
   const now = (): Date => new Date(2026, 2, 5, 14, minute++);
   return {
-    shelf: studyShelf(cupboard, { readStudy, writeStudy }, now),
+    shelf: studyShelf(cupboard, { readStudy, readDraft, writeStudy }, now),
     kept,
     writes: () => writes,
   };
@@ -51,18 +53,40 @@ const codes = (result: Result<unknown>): string[] =>
 describe('studyShelf', () => {
   it('save(id, study, 0) then load(id) gives the same study and the revision to go on from', async () => {
     const { shelf: studies } = shelf();
-    const entry = value(await studies.save('a', lowFerry(), 0));
+    const entry = value(await studies.save('a', typed(lowFerry()), 0));
     const loaded = value(await studies.load('a'));
     expect(loaded.study).toEqual(lowFerry());
     expect(loaded.revision).toBe(entry.revision);
-    value(await studies.save('a', { ...lowFerry(), title: 'Another' }, loaded.revision));
+    value(await studies.save('a', typed({ ...lowFerry(), title: 'Another' }), loaded.revision));
     expect(value(await studies.load('a')).study.title).toBe('Another');
+  });
+
+  it('keeps the study as typed beside the last valid one, also where an entry is out of all limits', async () => {
+    const { shelf: studies } = shelf();
+    const study = lowFerry();
+    const reversed = putAt(study, ['brief', 'obstacles', 0, 'fromM'], 9e6);
+    const draft = putAt(reversed, ['brief', 'road', 'maxGradient'], 7);
+    expect(readStudy(writeStudy(draft)).ok).toBe(false);
+    const entry = value(await studies.save('a', typed(study, draft), 0));
+    expect(value(await studies.load('a'))).toEqual({ study, draft, revision: entry.revision });
+    value(await studies.save('a', typed(study), entry.revision));
+    expect(value(await studies.load('a')).draft).toBeNull();
+  });
+
+  it('a draft that cannot be read is left out, and the valid study stands', async () => {
+    const { shelf: studies, kept } = shelf();
+    value(await studies.save('a', typed(lowFerry(), { ...lowFerry(), title: 'Typed' }), 0));
+    expect(value(await studies.load('a')).draft?.title).toBe('Typed');
+    for (const draft of ['{', '[]', '{"format":"spanledger-study","version":1}']) {
+      kept.set('a', { ...kept.get('a')!, draft });
+      expect(value(await studies.load('a'))).toMatchObject({ study: lowFerry(), draft: null });
+    }
   });
 
   it('list() shows the newest first, without the text', async () => {
     const { shelf: studies } = shelf();
-    await studies.save('old', lowFerry(), 0);
-    await studies.save('new', { ...lowFerry(), title: 'New' }, 0);
+    await studies.save('old', typed(lowFerry()), 0);
+    await studies.save('new', typed({ ...lowFerry(), title: 'New' }), 0);
     const entries = await studies.list();
     expect(entries.map(({ id }) => id)).toEqual(['new', 'old']);
     expect(entries[0]).not.toHaveProperty('text');
@@ -72,16 +96,16 @@ describe('studyShelf', () => {
 
   it('save() of an invalid study writes nothing', async () => {
     const { shelf: studies, writes } = shelf();
-    const entry = value(await studies.save('a', lowFerry(), 0));
+    const entry = value(await studies.save('a', typed(lowFerry()), 0));
     const broken = putAt(lowFerry(), ['brief', 'crossing', 'endM'], 0);
-    expect((await studies.save('a', broken, entry.revision)).ok).toBe(false);
+    expect((await studies.save('a', typed(broken), entry.revision)).ok).toBe(false);
     expect(writes()).toBe(1);
     expect(value(await studies.load('a')).study).toEqual(lowFerry());
   });
 
   it('save() over a study of a newer version, or over a damaged one, writes nothing', async () => {
     const { shelf: studies, kept, writes } = shelf();
-    value(await studies.save('a', lowFerry(), 0));
+    value(await studies.save('a', typed(lowFerry()), 0));
     const stored = kept.get('a')!;
     const newer = JSON.stringify({ ...(JSON.parse(stored.text) as object), version: 999 });
     for (const [text, code] of [
@@ -89,7 +113,7 @@ describe('studyShelf', () => {
       [stored.text.slice(0, 200), 'not-json'],
     ] as const) {
       kept.set('a', { ...stored, text });
-      expect(codes(await studies.save('a', lowFerry(), stored.revision))).toEqual([code]);
+      expect(codes(await studies.save('a', typed(lowFerry()), stored.revision))).toEqual([code]);
       expect(codes(await studies.load('a'))).toEqual([code]);
       expect(kept.get('a')?.text).toBe(text);
     }
@@ -98,12 +122,12 @@ describe('studyShelf', () => {
 
   it('save() over a revision somebody else has saved meanwhile writes nothing', async () => {
     const { shelf: studies } = shelf();
-    const mine = value(await studies.save('a', lowFerry(), 0));
-    value(await studies.save('a', { ...lowFerry(), title: 'Theirs' }, mine.revision));
-    const refused = await studies.save('a', { ...lowFerry(), title: 'Mine' }, mine.revision);
+    const mine = value(await studies.save('a', typed(lowFerry()), 0));
+    value(await studies.save('a', typed({ ...lowFerry(), title: 'Theirs' }), mine.revision));
+    const refused = await studies.save('a', typed({ ...lowFerry(), title: 'Mine' }), mine.revision);
     expect(codes(refused)).toEqual(['refused']);
     expect(refused.ok ? '' : refused.problems[0]?.received).toBe('one saved elsewhere at 14:01');
-    expect(codes(await studies.save('a', lowFerry(), 0))).toEqual(['refused']);
+    expect(codes(await studies.save('a', typed(lowFerry()), 0))).toEqual(['refused']);
     expect(value(await studies.load('a')).study.title).toBe('Theirs');
   });
 

@@ -175,6 +175,21 @@ describe('studyStore', () => {
     expect(endM()).toBe(1470);
   });
 
+  it('open(study, typed) shows what was typed with its problems over the valid study, and undo takes it back', () => {
+    const { store, value, endM } = opened();
+    const study = { ...lowFerry(), title: 'Another' };
+    const typed = putAt(study, ['brief', 'crossing', 'endM'], -5);
+    store.open(study, typed);
+    expect(value(store.draft)).toEqual(typed);
+    expect(value(store.problems).map(({ path }) => path.join('.'))).toContain('brief.crossing.endM');
+    expect([store.valid(), endM()]).toEqual([study, study.brief.crossing.endM]);
+    store.undo();
+    expect(value(store.draft)).toEqual(study);
+    expect(value(store.problems)).toEqual([]);
+    store.redo();
+    expect(value(store.draft)).toEqual(typed);
+  });
+
   it('open(study) forgets the history, and refuses a study that is not valid', () => {
     const { store, value, endTo } = opened();
     endTo(1475);

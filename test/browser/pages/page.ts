@@ -1,5 +1,5 @@
 import example from '../../../data/examples/low-ferry.json' with { type: 'json' };
-import { parseStudy, readStudy, sentence, writeStudy } from '../../../lib/index.ts';
+import { parseStudy, readDraft, readStudy, sentence, writeStudy } from '../../../lib/index.ts';
 import type { Study } from '../../../lib/index.ts';
 import { el } from '../../../notebooks/drawing/piece.ts';
 import { sheet as drawing } from '../../../notebooks/drawing/sheet.ts';
@@ -325,13 +325,13 @@ const trial = {
   /** Two pages that keep a study on the device: what each is told. */
   device: async () => {
     const name = `trial-${crypto.randomUUID()}`;
-    const format = { readStudy, writeStudy };
+    const format = { readStudy, readDraft, writeStudy };
     const one = studyShelf(await deviceCupboard(name), format, () => new Date());
     const other = studyShelf(await deviceCupboard(name), format, () => new Date());
     const study = store.valid();
-    const first = await one.save('a', { ...study, title: 'First' }, 0);
-    const second = await other.save('a', { ...study, title: 'Second' }, 1);
-    const late = await one.save('a', { ...study, title: 'Late' }, 1);
+    const first = await one.save('a', { study: { ...study, title: 'First' }, draft: null }, 0);
+    const second = await other.save('a', { study: { ...study, title: 'Second' }, draft: null }, 1);
+    const late = await one.save('a', { study: { ...study, title: 'Late' }, draft: null }, 1);
     const loaded = await one.load('a');
     return {
       saved: [first, second].map((result) => (result.ok ? result.value.revision : null)),
