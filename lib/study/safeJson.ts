@@ -42,9 +42,9 @@ export function safeJson(text: string): Result<unknown> {
   let value: unknown;
   try {
     value = JSON.parse(text);
-  } catch (error) {
-    const received = error instanceof Error ? error.message : 'text that cannot be read';
-    return { ok: false, problems: [problem('not-json', [], 'JSON text', received)] };
+  } catch {
+    const received = 'text that breaks off or has been damaged';
+    return { ok: false, problems: [problem('not-json', [], 'a study file in JSON', received)] };
   }
   const problems = unsafeParts(value);
   return problems.length > 0 ? { ok: false, problems } : { ok: true, value };

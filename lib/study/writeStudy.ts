@@ -20,7 +20,11 @@ export function writeStudy(study: Study): string {
   return canonical(study);
 }
 
-/** SHA-256 of the canonical JSON in UTF-8, 64 hexadecimal figures. */
+/**
+ * SHA-256 of the canonical JSON in UTF-8, 64 hexadecimal figures. The register is left out: it remembers the numbers that
+ * options have been given and asks nothing, so a study that is changed and changed back is the same study.
+ */
 export function fingerprint(study: Study): string {
-  return bytesToHex(sha256(utf8ToBytes(writeStudy(study))));
+  const asked = { ...study, options: { ...study.options, register: [] } };
+  return bytesToHex(sha256(utf8ToBytes(writeStudy(asked))));
 }

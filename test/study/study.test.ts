@@ -296,6 +296,16 @@ describe('writeStudy', () => {
   });
 });
 
+describe('fingerprint', () => {
+  it('fingerprint(study) is that of before, once numbers have been given to options', () => {
+    const study = lowFerry();
+    const register = [{ number: 1, form: 'composite-i', method: 'crane', supports: 4 }] as unknown;
+    const numbered = { ...study, options: { ...study.options, register } } as Study;
+    expect(writeStudy(numbered)).not.toBe(writeStudy(study));
+    expect(fingerprint(numbered)).toBe(fingerprint(study));
+  });
+});
+
 describe('migrate', () => {
   const steps = {
     1: (old: Readonly<Record<string, unknown>>) => ({ ...old, version: 2, b: old['a'] }),

@@ -142,7 +142,10 @@ function pasting(store: StudyStore): { readonly box: HTMLElement; readonly take:
       store.edit((study) => putAt(study, list, before), { what: 'taking back pasted obstacles' });
       said.replaceChildren();
     };
-    const words = [`${read.obstacles.length} obstacles taken in place of ${before.length}`, ...read.remarks];
+    const words = [
+      `${read.obstacles.length} ${read.obstacles.length === 1 ? 'obstacle' : 'obstacles'} taken in place of ${before.length}`,
+      ...read.remarks,
+    ];
     said.replaceChildren(
       `${words.join('; ')}. `,
       h('button', { type: 'button', class: 'action', onclick: takeBack }, 'Take them back'),

@@ -6,6 +6,8 @@ const entryWords: Readonly<Record<string, string>> = {
   toM: 'the end',
   floodFromM: 'the start',
   floodToM: 'the end',
+  startM: 'the start',
+  endM: 'the end',
 };
 
 const inWords = (text: string): string =>
