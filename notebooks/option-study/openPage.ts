@@ -45,6 +45,7 @@ import { problemBeside } from './brief/problemBeside.ts';
 import { briefSection } from './briefSection.ts';
 import { costSection } from './costSection.ts';
 import { depthSection } from './depthSection.ts';
+import { heldNote } from './heldNote.ts';
 import { programmeSection, tradeOffSection } from './programmeSection.ts';
 import { quantitySection } from './quantitySection.ts';
 import { rankingSection } from './rankingSection.ts';
@@ -188,12 +189,17 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
     },
     head: {
       title: words(['title'], { label: 'title of the study', most: 500 }),
-      // A worked example comes with its answer; a study of one's own takes some seconds.
-      answer: page.live(
-        { appraisal: cells.appraisal },
-        (v) => answerWords(v.appraisal),
-        coming === null ? 'The options are being worked out. The brief can be changed meanwhile.' : undefined,
-      ),
+      answer: [
+        page.live({ problems: store.problems }, (v) => heldNote(v.problems.length)),
+        // A worked example comes with its answer; a study of one's own takes some seconds.
+        page.live(
+          { appraisal: cells.appraisal },
+          (v) => answerWords(v.appraisal),
+          coming === null
+            ? 'The options are being worked out. The brief can be changed meanwhile.'
+            : undefined,
+        ),
+      ],
       next: page.live({ brief }, (v) => nextWords(v.brief)),
       block: [
         ['Study', words(['reference'], { label: 'reference of the study', most: 60 })],

@@ -16,6 +16,8 @@ export interface Limit {
 export interface FigureRules {
   /** Places after the point. */
   readonly places: number;
+  /** A count: nothing between whole numbers is taken. */
+  readonly whole?: boolean;
   readonly unit?: string;
   readonly min?: Limit;
   readonly max?: Limit;
@@ -99,7 +101,7 @@ export function judgeFigure(value: Figure, rules: FigureRules): Refusal | null {
     return rules.unknown === undefined ? { why: 'a figure is needed here', nearest: null } : null;
   }
   if (!Number.isFinite(value)) return { why: 'a figure is needed here', nearest: null };
-  const { min, max, places, unit } = rules;
+  const { min, max, places, unit, whole } = rules;
   const said = (limit: Limit, words: string): string => {
     const units = unit === undefined ? '' : ` ${unit}`;
     const because = limit.because === undefined ? '' : `, because ${limit.because}`;
@@ -117,6 +119,9 @@ export function judgeFigure(value: Figure, rules: FigureRules): Refusal | null {
       why: said(max, max.open === true ? 'less than' : 'at most'),
       nearest: atPlaces(max.value - (max.open === true ? step : 0), places),
     };
+  }
+  if (whole === true && !Number.isInteger(value)) {
+    return { why: `a whole number is expected, not ${value}`, nearest: Math.round(value) };
   }
   return null;
 }

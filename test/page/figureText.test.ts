@@ -75,6 +75,15 @@ describe('readFigure', () => {
   });
 });
 
+describe('a count', () => {
+  it('judgeFigure(value) refuses what is no whole number and offers the nearest', () => {
+    const lanes = { places: 0, whole: true, min: { value: 1 }, max: { value: 20 } };
+    expect(judgeFigure(2.5, lanes)).toEqual({ why: 'a whole number is expected, not 2.5', nearest: 3 });
+    expect(judgeFigure(2, lanes)).toBeNull();
+    expect(judgeFigure(0.5, lanes)?.nearest).toBe(1);
+  });
+});
+
 describe('judgeFigure', () => {
   const rules: FigureRules = {
     ...metres,

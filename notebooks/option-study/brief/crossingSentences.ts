@@ -23,7 +23,13 @@ export function lineSentence({ fields, chainage }: InWords, { brief }: Study): H
   const lanes = brief.deck.filter(({ kind }) => kind === 'lane').length;
   return [
     'A road of ',
-    fields.figure(laneCount, { label: 'lanes', places: 0, min: { value: 1 }, max: { value: 20 } }),
+    fields.figure(laneCount, {
+      label: 'lanes',
+      places: 0,
+      whole: true,
+      min: { value: 1 },
+      max: { value: 20 },
+    }),
     ` ${lanes === 1 ? 'lane' : 'lanes'}${footwayWords} has to cross `,
     crossed.length === 0 ? 'open ground' : listedPlaces(crossed),
     ' from chainage ',
