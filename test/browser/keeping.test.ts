@@ -54,6 +54,27 @@ describe('a study on the device', () => {
     expect(await shown(page, 'no-pier width')).toBe('64.0');
   });
 
+  it('comes back as it was typed, with what is refused in it, and the last valid one under Undo', async () => {
+    const fromOf = (of: Page) => of.locator('[id="1+030"] [role=spinbutton][aria-label*="from"]').first();
+    const before = await fromOf(page).textContent();
+    await fromOf(page).focus();
+    await page.keyboard.press('Control+a');
+    await page.keyboard.type('1300');
+    await page.keyboard.press('Enter');
+    await page.waitForSelector('[id="1+030"] [aria-invalid=true]', { state: 'attached' });
+    await type(page, 'no-pier width', '70');
+    await says(page, 'as typed, with what is refused');
+    await page.reload();
+    await briefed(page);
+    expect(await shown(page, 'no-pier width')).toBe('70.0');
+    await page.waitForSelector('[id="1+030"] [aria-invalid=true]', { state: 'attached' });
+    await page.getByRole('button', { name: 'Undo', exact: true }).click();
+    expect(await fromOf(page).textContent()).toBe(before);
+    expect(await page.locator('[aria-invalid=true]').count()).toBe(0);
+    expect(await shown(page, 'no-pier width')).toBe('64.0');
+    await allSaved(page);
+  });
+
   it('is not lost when the tab is killed while a pier is in hand', async () => {
     const grip = page.locator('[id="1+020"] [data-handle="pier/1"] .grip');
     const [x, y] = await middleOf(grip);
