@@ -1,4 +1,5 @@
 import type { Site, WaterBody } from '../model/index.ts';
+import { cosineOfSkew } from '../site/index.ts';
 import { floodSection, type FloodSection } from './floodSection.ts';
 
 /** The design flood of one water where it meets the crossing, square to its flow. Areas in m2, widths in m. */
@@ -17,7 +18,7 @@ export interface RiverFlow {
   readonly spread: number;
 }
 
-/** Shortens a section along the road to one square to the flow. */
+/** Shortens a section along the road to one square to the flow, along which the piers stand. */
 function square(section: FloodSection, cosSkew: number): FloodSection {
   return {
     areaM2: section.areaM2 * cosSkew,
@@ -25,10 +26,6 @@ function square(section: FloodSection, cosSkew: number): FloodSection {
     conveyance: section.conveyance * cosSkew,
   };
 }
-
-/** Cosine of the skew at which the road crosses; piers stand along the flow. Square where the skew is not known. */
-const cosineOfSkew = ({ skewDeg }: Pick<Site, 'skewDeg'>): number =>
-  Math.cos(((skewDeg ?? 0) * Math.PI) / 180);
 
 /** Whether the flood of a water reaches between the abutments. */
 export function floodsCrossing({ startM, endM }: Site, { river, fromM, toM }: WaterBody): boolean {
@@ -39,7 +36,7 @@ function flowOf(site: Site, body: WaterBody, water: number): RiverFlow | null {
   const { floodLevelM, river: given } = body;
   if (given === undefined || floodLevelM === null || !floodsCrossing(site, body)) return null;
   if (given.flowM3s === null && given.velocityMs === null) return null;
-  const cos = cosineOfSkew(site);
+  const cos = cosineOfSkew(site.skewDeg);
   const river = square(floodSection(site, floodLevelM, given.floodFromM, given.floodToM), cos);
   if (!(river.areaM2 > 0)) return null;
   const from = Math.max(given.floodFromM, site.startM);

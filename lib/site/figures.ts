@@ -2,6 +2,7 @@ import { described, type At, type Descriptor } from '../model/index.ts';
 import type { RoadEnd } from './approachEnd.ts';
 import { proposedApproaches } from './innerApproach.ts';
 import { curveRow } from './roadCurves.ts';
+import { alongSupportsM, cosineOfSkew } from './skew.ts';
 
 /** A figure of the site that is one of the brief, read on. */
 const copied = (path: string, from: (at: At) => string, label: string, unit = ''): Descriptor =>
@@ -287,6 +288,16 @@ export const siteFigures: readonly Descriptor[] = [
     inputs: () => ({ given: 'brief/crossing/planRadiusM' }),
   }),
   copied('site/skewDeg', () => 'brief/crossing/skewDeg', 'skew of the supports', 'deg'),
+  described({
+    path: 'site/alongSupportsM',
+    label: 'width of the deck along the supports',
+    unit: 'm',
+    method: 'quotient',
+    formula: 'deck width / cos of the skew; square where the skew is not known',
+    inputs: () => ({ width: 'site/deck/widthM', skew: 'site/skewDeg' }),
+    value: (at) => alongSupportsM(at.site),
+    compute: ({ width, skew }) => width / cosineOfSkew(Number.isFinite(skew) ? skew : null),
+  }),
   described({
     path: 'site/mainOpening/fromM',
     label: 'start of the main opening',

@@ -1,4 +1,5 @@
 import type { AbutmentWall, MeasuredLine, Site } from '../model/index.ts';
+import { alongSupportsM } from '../site/index.ts';
 import { substructureData } from './data.ts';
 import { frontFill } from './frontSlope.ts';
 import type { SupportAsk } from './supportAsk.ts';
@@ -37,14 +38,14 @@ function abutmentBars(kind: AbutmentWall, integral: boolean): number {
 }
 
 /** Columns under the beam of a spill-through abutment. */
-const spillColumns = (deckWidthM: number): number =>
-  Math.max(2, Math.ceil(deckWidthM / substructureData.abutment.columnSpacingM));
+const spillColumns = (beamM: number): number =>
+  Math.max(2, Math.ceil(beamM / substructureData.abutment.columnSpacingM));
 
 /** Walls of an abutment of a kind between its levels; stem thickness and columns are by height (common practice). */
 export function wallsOf(site: Site, ask: SupportAsk, levels: WallLevels, kind: AbutmentWall): Walls {
   const { abutment } = substructureData;
   const { seatM, footM, groundM } = levels;
-  const width = site.deck.widthM;
+  const width = alongSupportsM(site);
   const height = Math.max(0, ask.roadLevelM - footM);
   const barsKgM3 = abutmentBars(kind, ask.castIn === true);
   const backWallM3 = Math.max(0, ask.roadLevelM - seatM) * abutment.backWallM * width;
@@ -94,7 +95,7 @@ export function wallLines(ask: SupportAsk, walls: Walls): MeasuredLine[] {
   const how = spills
     ? `${walls.columns} columns ${walls.stemLengthM.toFixed(2)} m square, beam, back wall${cast}`
     : `stem ${walls.stemLengthM.toFixed(2)} m thick, back wall${cast}`;
-  const slope = 'prism under the slope and a quarter of a cone at each side';
+  const slope = 'prism under the slope and a piece of a cone at each side';
   return [
     line(ask, 'abutments', 'abutment-concrete', wall, `${name} ${walls.kind}`, how),
     wingWallsLine(ask, walls.wings),

@@ -207,7 +207,7 @@ export const alongFigures: readonly Descriptor[] = [
       return {
         level: `${at.root}/supports/${support}/topLevelM`,
         ground: `${at.root}/supports/${support}/groundLevelM`,
-        width: 'site/deck/widthM',
+        width: 'site/alongSupportsM',
         modulus: 'data/substructure/concrete/modulusMPa',
         share: 'data/substructure/concrete/crackedShare',
         slenderness: 'data/substructure/pier/slenderness',

@@ -1,9 +1,15 @@
 import type { Site } from '../model/index.ts';
+import { alongSupportsM, cosineOfSkew } from '../site/index.ts';
 import { substructureData } from './data.ts';
 
-/** How far the fill spills before a spill-through abutment, m: berm and side slope from the foot of its beam to the ground. */
+/**
+ * How far the fill spills before a spill-through abutment along the road, m: berm and side slope from the foot of its beam to
+ * the ground, both square to the line of supports.
+ */
 export function slopeReach(site: Site, beamFootM: number, groundLevelM: number): number {
-  return substructureData.abutment.bermM + site.road.fillSideSlope * Math.max(0, beamFootM - groundLevelM);
+  const squareM =
+    substructureData.abutment.bermM + site.road.fillSideSlope * Math.max(0, beamFootM - groundLevelM);
+  return squareM / cosineOfSkew(site.skewDeg);
 }
 
 /**
@@ -19,12 +25,15 @@ export function slopeRoom(site: Site, chainageM: number): number {
   return Math.min(site.lengthM, ...[...site.zones, ...site.soffitLimits, ...site.waters].map(away));
 }
 
-/** Fill before a spill-through abutment, m3: prism under the slope as wide as the deck and a quarter of a cone at each side. */
+/**
+ * Fill before a spill-through abutment, m3: prism under the slope as wide as the deck is along the supports, and a piece of a
+ * cone at each side, a quarter where they are square; on a skew what one side gains the other loses.
+ */
 export function frontFill(site: Site, beamFootM: number, groundLevelM: number): number {
   const h = Math.max(0, beamFootM - groundLevelM);
   const { fillSideSlope: s } = site.road;
   return (
-    site.deck.widthM * (substructureData.abutment.bermM * h + (s * h * h) / 2) +
+    alongSupportsM(site) * (substructureData.abutment.bermM * h + (s * h * h) / 2) +
     (Math.PI * s * s * h ** 3) / 6
   );
 }

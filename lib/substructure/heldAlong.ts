@@ -1,5 +1,6 @@
 import type { CastInPier, Design, Site, Unit } from '../model/index.ts';
 import { constructionDepth } from '../site/constructionDepth.ts';
+import { alongSupportsM } from '../site/skew.ts';
 import { bearingKind, rubberHeight } from './bearingKind.ts';
 import { substructureData } from './data.ts';
 import { deckMaterial } from './deckMaterial.ts';
@@ -178,7 +179,7 @@ export function heldAlong(on: UnitOnGround, alone = false): HeldAlong {
       return along * heights[i]!;
     });
   };
-  const piers = x.map((at, i) => pierStiffness(site.deck.widthM, heights[i]!, leafAt(site, at)));
+  const piers = x.map((at, i) => pierStiffness(alongSupportsM(site), heights[i]!, leafAt(site, at)));
   const byPiers = runsWith(held, x.length).map(([from, to]): HeldAlong => {
     const stiffnessKNm = x.map((_, i) => (i >= from && i <= to ? piers[i]! : 0));
     return { stiffnessKNm, stillM: stillAt(x, stiffnessKNm), afloat: false };

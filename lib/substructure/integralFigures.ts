@@ -96,8 +96,8 @@ export const integralFigures: readonly Descriptor[] = [
     label: on('width of the wall'),
     unit: 'm',
     method: 'as given',
-    formula: 'width of the deck',
-    inputs: () => ({ width: 'site/deck/widthM' }),
+    formula: 'width of the deck along the supports',
+    inputs: () => ({ width: 'site/alongSupportsM' }),
     compute: ({ width }) => width,
   }),
   described({

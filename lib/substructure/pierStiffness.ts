@@ -17,7 +17,7 @@ interface SlenderShaft {
 }
 
 /** A shaft as thick as its slenderness alone asks for, in the steps in which shafts are sized. */
-function slenderShaft(deckWidthM: number, heightM: number, isLeaf: boolean): SlenderShaft {
+function slenderShaft(alongSupportsM: number, heightM: number, isLeaf: boolean): SlenderShaft {
   const { pier } = substructureData;
   const isHollow = heightM > pier.hollowAboveM;
   const isOne = isLeaf || isHollow;
@@ -26,7 +26,7 @@ function slenderShaft(deckWidthM: number, heightM: number, isLeaf: boolean): Sle
   const lengthM = Math.max(isOne ? pier.leastLeafM : pier.leastColumnM, steps * pier.stepM);
   return {
     lengthM,
-    inertiaM4: isOne ? shaftInertia(lengthM, shaftWidth(deckWidthM), isHollow) : (2 * lengthM ** 4) / 12,
+    inertiaM4: isOne ? shaftInertia(lengthM, shaftWidth(alongSupportsM), isHollow) : (2 * lengthM ** 4) / 12,
   };
 }
 
@@ -36,15 +36,15 @@ export const crackedEI = (inertiaM4: number): number =>
 
 /**
  * Stiffness of a pier against its top moving along the road, kN per m: 3 E I / h^3 of a cantilever from a rigid foundation,
- * height in metres. Its shaft is as thick as its slenderness alone asks for; cracks and creep leave it a share of its
+ * height in metres, under a deck so wide along its supports, m. Its shaft is as thick as its slenderness alone asks for; cracks and creep leave it a share of its
  * stiffness.
  */
-export function pierStiffness(deckWidthM: number, heightM: number, isLeaf: boolean): number {
-  return (3 * crackedEI(slenderShaft(deckWidthM, heightM, isLeaf).inertiaM4)) / heightM ** 3;
+export function pierStiffness(alongSupportsM: number, heightM: number, isLeaf: boolean): number {
+  return (3 * crackedEI(slenderShaft(alongSupportsM, heightM, isLeaf).inertiaM4)) / heightM ** 3;
 }
 
 /** The same of a leaf that the deck is cast in with, kN per m: up to 12 E I / h^3. */
-export function framedStiffness(deckWidthM: number, heightM: number, deckTurnKNm: number): number {
-  const eiKNm2 = crackedEI(slenderShaft(deckWidthM, heightM, true).inertiaM4);
+export function framedStiffness(alongSupportsM: number, heightM: number, deckTurnKNm: number): number {
+  const eiKNm2 = crackedEI(slenderShaft(alongSupportsM, heightM, true).inertiaM4);
   return swayOf({ heightM, eiKNm2, deckTurnKNm });
 }

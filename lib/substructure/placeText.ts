@@ -13,6 +13,7 @@ export function placeText(site: Site, chainageM: number): string {
     groundUnder(site, chainageM),
     site.deck,
     site.road.fillSideSlope,
+    site.skewDeg,
     // Only an abutment has a slope before it.
     chainageM === site.startM || chainageM === site.endM ? slopeRoom(site, chainageM) : null,
   ]);

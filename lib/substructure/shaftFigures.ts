@@ -126,8 +126,8 @@ export const shaftFigures: readonly Descriptor[] = [
     label: on('width of the walls'),
     unit: 'm',
     method: 'as wide as the deck',
-    formula: 'deck width',
-    inputs: () => ({ deck: 'site/deck/widthM' }),
+    formula: 'width of the deck along the supports',
+    inputs: () => ({ deck: 'site/alongSupportsM' }),
     compute: ({ deck }) => deck,
   }),
   described({
@@ -163,9 +163,9 @@ export const shaftFigures: readonly Descriptor[] = [
     label: on('width of the shaft'),
     unit: 'm',
     method: 'greater of two',
-    formula: 'share of the deck width under the bearings, and the least width',
+    formula: 'share of the width of the deck along the supports, under the bearings, and the least width',
     inputs: () => ({
-      deck: 'site/deck/widthM',
+      deck: 'site/alongSupportsM',
       share: pier('leafWidthShare'),
       least: pier('leastLeafWidthM'),
     }),

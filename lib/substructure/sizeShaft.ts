@@ -8,7 +8,8 @@ export interface ShaftTask {
   /** Height from the top of the foundation to the bearings, m. */
   readonly heightM: number;
   readonly footLevelM: number;
-  readonly deckWidthM: number;
+  /** Length of the line of supports under the deck, m: its width where they are square to it. */
+  readonly alongSupportsM: number;
   /** True where it stands in water or may be struck: one wall instead of two columns. */
   readonly leaf: boolean;
   /** The deck is cast in with it: one wall, bars for its bending at both ends. */
@@ -36,7 +37,7 @@ export function sizeShaft(task: ShaftTask): PierShaft {
   const hollow = task.heightM > pier.hollowAboveM;
   const leaf = task.leaf || task.framed === true || hollow;
   const columns = leaf ? 1 : 2;
-  const widthM = shaftWidth(task.deckWidthM);
+  const widthM = shaftWidth(task.alongSupportsM);
   const sectionOf = (lengthM: number): Section => ({
     lengthM,
     widthM: leaf ? widthM : lengthM,
@@ -72,9 +73,9 @@ export function sectionArea(lengthM: number, widthM: number, hollow: boolean): n
   return lengthM * widthM - Math.max(0, lengthM - wall) * Math.max(0, widthM - wall);
 }
 
-/** Width of a leaf under a deck, m. */
-export const shaftWidth = (deckWidthM: number): number =>
-  Math.max(substructureData.pier.leastLeafWidthM, substructureData.pier.leafWidthShare * deckWidthM);
+/** Width of a leaf under a deck so wide along its supports, m. */
+export const shaftWidth = (alongSupportsM: number): number =>
+  Math.max(substructureData.pier.leastLeafWidthM, substructureData.pier.leafWidthShare * alongSupportsM);
 
 /** Inertia of a leaf about the axis across the road, m4. */
 export function shaftInertia(lengthM: number, widthM: number, hollow: boolean): number {

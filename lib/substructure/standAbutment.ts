@@ -1,4 +1,5 @@
 import type { AbutmentWall, MeasuredLine, PierShaft, Site, Support } from '../model/index.ts';
+import { alongSupportsM } from '../site/index.ts';
 import { wallLines, wallsOf } from './abutmentWalls.ts';
 import type { Combo } from './combos.ts';
 import { substructureData } from './data.ts';
@@ -20,7 +21,8 @@ import {
 /**
  * An abutment, the cheapest of those that fit here: a bank seat where the road is little above the ground; a full-height
  * wall; columns through fill that spills out to the front where nothing is in its way. With back wall and two wing walls
- * that reach as far as the side slope of the fill. Active pressure and surcharge go into the foundation, as if nothing
+ * that reach as far as the side slope of the fill. On a skew all walls stand along the line of supports, longer than the
+ * deck is wide. Active pressure and surcharge go into the foundation, as if nothing
  * propped it, also where the deck is cast in.
  */
 export function standAbutment(
@@ -57,11 +59,12 @@ function standOn(site: Site, ask: SupportAsk, setting: Setting, wall: AbutmentWa
     seatM - abutment.seatBeamM,
     wall === 'bank seat' ? Infinity : setting.groundLevelM - piles.capCoverM,
   );
+  const widthM = alongSupportsM(site);
   const walls = wallsOf(site, ask, { seatM, footM, groundM: setting.groundLevelM }, wall);
   const concreteM3 = walls.stemM3 + walls.backWallM3 + walls.wings.wallsM3;
   const shaft: PierShaft = {
     lengthM: walls.stemLengthM,
-    widthM: site.deck.widthM,
+    widthM,
     columns: walls.columns,
     concreteM3,
     reinforcementKg: concreteM3 * walls.barsKgM3,
@@ -71,7 +74,7 @@ function standOn(site: Site, ask: SupportAsk, setting: Setting, wall: AbutmentWa
     name: ask.name,
     ...(ask.index === undefined ? {} : { support: ask.index }),
     shaftLengthM: walls.stemLengthM,
-    shaftWidthM: site.deck.widthM,
+    shaftWidthM: widthM,
     combos: abutmentCombos(ask, setting, seatM, weightKN),
     groundLevelM: Math.min(setting.groundLevelM, footM + piles.capCoverM),
     waterLevelM: setting.waterLevelM,
@@ -80,7 +83,7 @@ function standOn(site: Site, ask: SupportAsk, setting: Setting, wall: AbutmentWa
     shaftFootM: footM,
     shaftAreaM2:
       walls.columns === 1
-        ? walls.stemLengthM * site.deck.widthM
+        ? walls.stemLengthM * widthM
         : walls.columns * walls.stemLengthM * walls.stemLengthM,
     shaftBarsKgM3: walls.barsKgM3,
     shaftItem: 'abutment-concrete',
@@ -100,7 +103,7 @@ function standOn(site: Site, ask: SupportAsk, setting: Setting, wall: AbutmentWa
     abutment: { wall, integral: ask.castIn === true },
     articulation: articulationOf(ask, ask.acrossKN * factors.windWithTraffic),
     lines: [
-      ...articulationLines(ask, site.deck),
+      ...articulationLines(ask, widthM),
       ...wallLines(ask, walls),
       ...waterAccessLines(ask, setting.waterDepthM),
     ],

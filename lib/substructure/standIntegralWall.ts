@@ -1,5 +1,5 @@
 import type { IntegralWall, Site, Support, WallQuake } from '../model/index.ts';
-import { constructionDepth } from '../site/index.ts';
+import { alongSupportsM, constructionDepth } from '../site/index.ts';
 import type { Combo } from './combos.ts';
 import { substructureData } from './data.ts';
 import type { FoundationTask } from './foot.ts';
@@ -24,7 +24,7 @@ export function standIntegralWall(site: Site, ask: SupportAsk, wall: IntegralWal
   const setting = settingAt(site, ask.chainageM);
   const slabM = ask.roadLevelM - constructionDepth(site.deck, 0);
   const footM = slabM - wall.heightM;
-  const widthM = site.deck.widthM;
+  const widthM = alongSupportsM(site);
   const isEnd = ask.kind === 'abutment';
   const wings = isEnd ? wingsOf(site, Math.max(0, ask.roadLevelM - footM)) : null;
   const wingsM3 = wings?.wallsM3 ?? 0;

@@ -1,4 +1,5 @@
 import type { Site, Support } from '../model/index.ts';
+import { alongSupportsM } from '../site/index.ts';
 import { substructureData } from './data.ts';
 import type { FoundationTask } from './foot.ts';
 import { foundationFor } from './foundationFor.ts';
@@ -19,7 +20,10 @@ import {
   waterAccessLines,
 } from './supportLines.ts';
 
-/** A pier, anchor pier or pylon foot with one foundation for each ground class of its stretch. */
+/**
+ * A pier, anchor pier or pylon foot with one foundation for each ground class of its stretch. On a skew its shaft or head
+ * stands along the line of supports, and is longer for it; a pylon stands as its form makes it.
+ */
 export function standPier(site: Site, ask: SupportAsk): Support {
   const { pier, bearings, concrete, piles, wind } = substructureData;
   const setting = settingAt(site, ask.chainageM);
@@ -38,7 +42,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     frame
       ? {
           heightM: shaftHeightM,
-          eiKNm2: crackedEI(shaftInertia(lengthM, shaftWidth(site.deck.widthM), hollow)),
+          eiKNm2: crackedEI(shaftInertia(lengthM, shaftWidth(alongSupportsM(site)), hollow)),
           deckTurnKNm: frame.deckTurnKNm,
         }
       : null;
@@ -46,7 +50,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
   const shaftTask: ShaftTask = {
     heightM: shaftHeightM,
     footLevelM: shaftFootM,
-    deckWidthM: site.deck.widthM,
+    alongSupportsM: alongSupportsM(site),
     leaf: wet,
     ...(frame
       ? {
@@ -118,7 +122,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
         : {}),
     },
     lines: [
-      ...articulationLines(ask, site.deck),
+      ...articulationLines(ask, alongSupportsM(site)),
       ...shaftLines(ask, shaft, 'piers', 'pier-concrete', how),
       ...waterAccessLines(ask, setting.waterDepthM),
       ...softZoneLines(ask, setting.soft),

@@ -1,12 +1,4 @@
-import type {
-  Articulation,
-  BillPart,
-  DeckSpec,
-  MeasuredLine,
-  PierShaft,
-  Support,
-  Zone,
-} from '../model/index.ts';
+import type { Articulation, BillPart, MeasuredLine, PierShaft, Support, Zone } from '../model/index.ts';
 import { bearingKind } from './bearingKind.ts';
 import { substructureData } from './data.ts';
 import type { SupportAsk } from './supportAsk.ts';
@@ -50,8 +42,8 @@ export function articulationOf(
   };
 }
 
-/** Bearings, joint and tie-down of a support. */
-export function articulationLines(ask: SupportAsk, deck: Pick<DeckSpec, 'widthM'>): MeasuredLine[] {
+/** Bearings, joint and tie-down of a support whose line is `alongM` long under the deck, m. */
+export function articulationLines(ask: SupportAsk, alongM: number): MeasuredLine[] {
   const lines: MeasuredLine[] = [];
   const load = bearingLoadMN(ask);
   if (load > 0 && ask.bearings > 0) {
@@ -61,10 +53,8 @@ export function articulationLines(ask: SupportAsk, deck: Pick<DeckSpec, 'widthM'
   }
   const elements = jointElements(ask.jointMovementMm);
   if (elements > 0) {
-    const how = `${Math.round(ask.jointMovementMm)} mm: ${elements} elements over ${deck.widthM} m`;
-    lines.push(
-      line(ask, 'bearings-joints', 'expansion-joint', elements * deck.widthM, `${ask.name} joint`, how),
-    );
+    const how = `${Math.round(ask.jointMovementMm)} mm: ${elements} elements over ${Number(alongM.toFixed(2))} m`;
+    lines.push(line(ask, 'bearings-joints', 'expansion-joint', elements * alongM, `${ask.name} joint`, how));
   }
   const uplift = upliftKN(ask) * substructureData.bearings.tieDownShare;
   if (uplift > 0) {

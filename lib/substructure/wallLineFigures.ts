@@ -1,4 +1,5 @@
 import { described, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
+import { cosineOfSkew } from '../site/index.ts';
 import { supportName } from './supportFigures.ts';
 
 const path = 'options/:option/supports/:support/lines/:line/quantity';
@@ -25,6 +26,10 @@ const wings = (at: At) =>
     foot: `${at.foot}/footM`,
     slope: 'site/road/fillSideSlope',
   }) as const;
+
+/** Wings are longer on a skew; one that is not known is square. */
+const skew = { skew: 'site/skewDeg' } as const;
+const cosineOf = (skewDeg: number): number => cosineOfSkew(Number.isFinite(skewDeg) ? skewDeg : null);
 
 /** Where the brief says of the soft stretch that a line is measured for. */
 function softStretchOf(at: At): string {
@@ -62,11 +67,11 @@ export const wallLineFigures: readonly Descriptor[] = [
     label,
     unit: 'm',
     method: 'product',
-    formula: 'movement / movement of one element, rounded up, x deck width',
+    formula: 'movement / movement of one element, rounded up, x length of the supports',
     inputs: (at) => ({
       movement: `${at.foot}/articulation/jointMovementMm`,
       element: 'data/substructure/movement/jointGroupMm',
-      width: 'site/deck/widthM',
+      width: 'site/alongSupportsM',
     }),
     compute: ({ movement, element, width }) => Math.ceil(movement / element - 1e-9) * width,
   }),
@@ -119,13 +124,13 @@ export const wallLineFigures: readonly Descriptor[] = [
     label,
     unit: 'm3',
     method: 'volume',
-    formula: '(thickness x (seat - foot) + back wall x (road - seat)) x deck width',
+    formula: '(thickness x (seat - foot) + back wall x (road - seat)) x length of the supports',
     inputs: (at) => ({
       ...wings(at),
       seat: `${at.foot}/topLevelM`,
       thickness: `${at.foot}/shaft/lengthM`,
       backWall: wall('backWallM'),
-      width: 'site/deck/widthM',
+      width: 'site/alongSupportsM',
     }),
     compute: (v) =>
       (v.thickness * Math.max(0, v.seat - v.foot) + Math.max(0, v.road - v.seat) * v.backWall) * v.width,
@@ -137,7 +142,7 @@ export const wallLineFigures: readonly Descriptor[] = [
     unit: 'm3',
     method: 'volume',
     formula:
-      'columns x side^2 x (foot of the beam - foot) + (beam thickness x its depth + back wall x (road - seat)) x deck width',
+      'columns x side^2 x (foot of the beam - foot) + (beam thickness x its depth + back wall x (road - seat)) x length of the supports',
     inputs: (at) => ({
       ...wings(at),
       seat: `${at.foot}/topLevelM`,
@@ -146,7 +151,7 @@ export const wallLineFigures: readonly Descriptor[] = [
       beam: wall('seatBeamM'),
       least: wall('leastStemM'),
       backWall: wall('backWallM'),
-      width: 'site/deck/widthM',
+      width: 'site/alongSupportsM',
     }),
     compute: (v) =>
       v.columns * v.side ** 2 * Math.max(0, v.seat - v.beam - v.foot) +
@@ -159,14 +164,14 @@ export const wallLineFigures: readonly Descriptor[] = [
     unit: 'm3',
     method: 'volume',
     formula:
-      'W (berm h + s h^2 / 2) + pi s^2 h^3 / 6: h from the ground to the foot of the beam, s side slope',
+      'W (berm h + s h^2 / 2) + pi s^2 h^3 / 6: W along the supports, h from the ground to the foot of the beam, s side slope',
     inputs: (at) => ({
       seat: `${at.foot}/topLevelM`,
       beam: wall('seatBeamM'),
       ground: `${at.foot}/groundLevelM`,
       berm: wall('bermM'),
       slope: 'site/road/fillSideSlope',
-      width: 'site/deck/widthM',
+      width: 'site/alongSupportsM',
     }),
     compute: (v) => {
       const h = Math.max(0, v.seat - v.beam - v.ground);
@@ -179,18 +184,20 @@ export const wallLineFigures: readonly Descriptor[] = [
     label,
     unit: 'm3',
     method: 'volume',
-    formula: 'two wings: side slope x h long, mean height x h high; h from the foot of the beam to the road',
+    formula:
+      'two wings: side slope x h / cos of the skew long, mean height x h high; h from the foot of the beam to the road',
     inputs: (at) => ({
       road: `${at.foot}/roadM`,
       seat: `${at.foot}/topLevelM`,
       beam: wall('seatBeamM'),
       slope: 'site/road/fillSideSlope',
+      ...skew,
       mean: wall('wingMeanHeight'),
       thickness: wall('wingM'),
     }),
     compute: (v) => {
       const h = Math.max(0, v.road - (v.seat - v.beam));
-      return 2 * v.slope * h * v.mean * h * v.thickness;
+      return (2 * v.slope * h * v.mean * h * v.thickness) / cosineOf(v.skew);
     },
   }),
   described({
@@ -199,11 +206,11 @@ export const wallLineFigures: readonly Descriptor[] = [
     label,
     unit: 'm3',
     method: 'volume',
-    formula: 'two wings: side slope x h long, mean height x h high; h from foot to road',
-    inputs: (at) => ({ ...wings(at), mean: wall('wingMeanHeight'), thickness: wall('wingM') }),
+    formula: 'two wings: side slope x h / cos of the skew long, mean height x h high; h from foot to road',
+    inputs: (at) => ({ ...wings(at), ...skew, mean: wall('wingMeanHeight'), thickness: wall('wingM') }),
     compute: (v) => {
       const h = Math.max(0, v.road - v.foot);
-      return 2 * v.slope * h * v.mean * h * v.thickness;
+      return (2 * v.slope * h * v.mean * h * v.thickness) / cosineOf(v.skew);
     },
   }),
   described({
@@ -212,11 +219,16 @@ export const wallLineFigures: readonly Descriptor[] = [
     label,
     unit: 'm3',
     method: 'volume',
-    formula: 'two footings: side slope x h long, share of h wide; h from foot to road',
-    inputs: (at) => ({ ...wings(at), share: wall('wingFootingWidth'), thickness: wall('wingFootingM') }),
+    formula: 'two footings: side slope x h / cos of the skew long, share of h wide; h from foot to road',
+    inputs: (at) => ({
+      ...wings(at),
+      ...skew,
+      share: wall('wingFootingWidth'),
+      thickness: wall('wingFootingM'),
+    }),
     compute: (v) => {
       const h = Math.max(0, v.road - v.foot);
-      return 2 * v.slope * h * v.share * h * v.thickness;
+      return (2 * v.slope * h * v.share * h * v.thickness) / cosineOf(v.skew);
     },
   }),
   described({

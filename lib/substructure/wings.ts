@@ -1,4 +1,5 @@
 import type { MeasuredLine, Site } from '../model/index.ts';
+import { cosineOfSkew } from '../site/index.ts';
 import { substructureData } from './data.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import { line } from './supportLines.ts';
@@ -9,10 +10,13 @@ export interface Wings {
   readonly footingsM3: number;
 }
 
-/** Two wings as long as the side slope of the fill, falling with it, for a retained height, m. */
-export function wingsOf(site: Pick<Site, 'road'>, heightM: number): Wings {
+/**
+ * Two wings as long as the side slope of the fill, falling with it, for a retained height, m. On a skew they are longer:
+ * in line with the wall they run aslant down the slope beside the road, along the road down the one before the wall.
+ */
+export function wingsOf(site: Pick<Site, 'road' | 'skewDeg'>, heightM: number): Wings {
   const { abutment } = substructureData;
-  const lengthM = site.road.fillSideSlope * heightM;
+  const lengthM = (site.road.fillSideSlope * heightM) / cosineOfSkew(site.skewDeg);
   return {
     wallsM3: 2 * lengthM * abutment.wingMeanHeight * heightM * abutment.wingM,
     footingsM3: 2 * lengthM * abutment.wingFootingWidth * heightM * abutment.wingFootingM,

@@ -4,7 +4,7 @@ import { bendingCapacity, sizeShaft } from '../../lib/substructure/sizeShaft.ts'
 const task = {
   heightM: 8,
   footLevelM: 0,
-  deckWidthM: 12,
+  alongSupportsM: 12,
   leaf: true,
   designVerticalKN: 12_000,
   permanentKN: 6000,
