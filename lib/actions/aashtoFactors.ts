@@ -1,3 +1,5 @@
+import { girderCorner, MOST_SKEW_DEG, skewTangent } from './obtuseCorner.ts';
+
 /** What the AASHTO LRFD distribution factors of girder decks depend on (4.6.2.2, slab on girders, type k and a). */
 export interface GirderDeck {
   readonly spacingM: number;
@@ -7,6 +9,7 @@ export interface GirderDeck {
   /** Longitudinal stiffness n (I + A e2), m4. */
   readonly kgM4: number;
   readonly girders: number;
+  /** Skew of the supports from square, degrees, either way; square when absent. */
   readonly skewDeg?: number;
 }
 
@@ -43,14 +46,12 @@ export function aashtoFactors(deck: GirderDeck): GirderFactors {
   const several = 0.075 + (S / 9.5) ** 0.6 * (S / L) ** 0.2 * stiff ** 0.1;
   const one = 0.06 + (S / 14) ** 0.4 * (S / L) ** 0.3 * stiff ** 0.1;
   const shear = Math.max(0.2 + S / 12 - (S / 35) ** 2, 0.36 + S / 25);
-  const skew = deck.skewDeg ?? 0;
-  const tangent = Math.tan((Math.min(skew, 60) * Math.PI) / 180);
+  const skew = Math.abs(deck.skewDeg ?? 0);
   const c1 = skew < 30 ? 0 : 0.25 * stiff ** 0.25 * (S / L) ** 0.5;
-  const momentSkew = 1 - c1 * tangent ** 1.5;
-  const shearSkew = 1 + 0.2 * (1 / stiff) ** 0.3 * tangent;
+  const momentSkew = 1 - c1 * skewTangent(skew) ** 1.5;
   return {
     moment: Math.max(several, one) * momentSkew,
-    shear: shear * shearSkew,
+    shear: shear * girderCorner(deck, skew),
     momentOneLane: (one * momentSkew) / 1.2,
     outside: [
       ...outside('girder spacing', S, 3.5, 16, 'ft'),
@@ -58,7 +59,7 @@ export function aashtoFactors(deck: GirderDeck): GirderFactors {
       ...outside('span', L, 20, 240, 'ft'),
       ...outside('number of girders', deck.girders, 4, Infinity, ''),
       ...outside('stiffness Kg', Kg, 10000, 7000000, 'in4'),
-      ...outside('skew', skew, 0, 60, 'degrees'),
+      ...outside('skew', skew, 0, MOST_SKEW_DEG, 'degrees'),
     ],
   };
 }

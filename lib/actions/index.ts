@@ -4,6 +4,13 @@ export { serviceTraffic, type LongSpanLoad, type TrafficLoad } from './trafficLo
 export { trafficOnDeck } from './trafficOnDeck.ts';
 export { trafficOnCrossLine, worstLaneShare } from './trafficOnCrossLine.ts';
 export { aashtoFactors, girderStiffnessM4, type GirderDeck, type GirderFactors } from './aashtoFactors.ts';
+export {
+  atObtuseCorner,
+  cellularCorner,
+  closeBeamCorner,
+  girderCorner,
+  spreadBoxCorner,
+} from './obtuseCorner.ts';
 export { leverRule } from './leverRule.ts';
 export { crossValue, type CrossLine } from './crossLine.ts';
 export { rigidCrossbeam, trafficOnGirder, type GirderOptions } from './trafficOnGirder.ts';

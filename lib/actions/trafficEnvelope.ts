@@ -53,10 +53,12 @@ export function trafficEnvelope(
   const hogs = uniform(beam, 1).momentKNm;
   const result = emptyEnvelope(beam);
   const out: Extremes = { max: 0, min: 0 };
+  const { obtuse = 1 } = load;
   const shearLoad = {
     ...load,
-    vehicleFactor: load.vehicleFactor * load.shearRatio,
-    udlKNm: load.udlKNm * load.shearRatio,
+    vehicleFactor: load.vehicleFactor * load.shearRatio * obtuse,
+    udlKNm: load.udlKNm * load.shearRatio * obtuse,
+    footwayKNm: load.footwayKNm * obtuse,
   };
   let beyond = false;
 

@@ -12,6 +12,8 @@ export interface TrafficLoad {
   readonly footwayKNm: number;
   /** What shears and reactions carry against moments (AASHTO has factors for each); 1 otherwise. */
   readonly shearRatio: number;
+  /** What all shears and reactions grow by at the obtuse corner of a skew deck; 1 when absent. */
+  readonly obtuse?: number;
   /** Loaded lanes behind the factor. */
   readonly loadedLanes: number;
   /** How it was shared out across the deck. */

@@ -4,6 +4,7 @@ import type { CrossLine } from './crossLine.ts';
 import { leverRule } from './leverRule.ts';
 import { loadStandard } from './loadStandard.ts';
 import { leftKerbM } from './trafficOnDeck.ts';
+import { atObtuseCorner, girderCorner } from './obtuseCorner.ts';
 import type { TrafficLoad } from './trafficLoad.ts';
 import { trafficOnCrossLine } from './trafficOnCrossLine.ts';
 
@@ -13,7 +14,8 @@ export type GirderOptions = Pick<GirderDeck, 'spanM' | 'slabM' | 'kgM4' | 'skewD
 /**
  * Traffic on one girder of a deck. Two girders: lever rule. More: rigid crossbeam; under AASHTO, with `options` and
  * inside their validity, the distribution factors for an inner girder, and for an outer one the worst of its corrected
- * factor, the lever rule with one lane and the rigid crossbeam (4.6.2.2.2d).
+ * factor, the lever rule with one lane and the rigid crossbeam (4.6.2.2.2d). With `options` shears of a skew deck are those
+ * at its obtuse corner, by the AASHTO factor under either standard; only the AASHTO factors take less moment for a skew.
  * @param girderOffsetsM girder lines, m from the middle of the deck, rising
  * @param girder which of them
  * @throws RangeError for fewer than two girders or one that is not there
@@ -31,7 +33,8 @@ export function trafficOnGirder(
     throw new RangeError(`girder: expected 0 to ${n - 1}, received ${girder}`);
   }
   const standard = loadStandard(id);
-  const rigid = placedOn(id, deck, rigidCrossbeam(girderOffsetsM, girder));
+  const corner = options ? girderCorner(options, options.skewDeg ?? 0) : 1;
+  const rigid = atObtuseCorner(placedOn(id, deck, rigidCrossbeam(girderOffsetsM, girder)), corner);
   if (n === 2) return { ...rigid, distribution: 'lever rule' };
   if (!standard.distributionFactors || !options) return rigid;
 
@@ -40,7 +43,8 @@ export function trafficOnGirder(
   const inner = aashtoFactors({ ...options, spacingM, girders: n });
   const edge = outer ? outerCorrection(kerbBeyond(deck, girderOffsetsM, girder)) : null;
   if (inner.outside.length > 0 || (edge && edge.outside.length > 0)) return rigid;
-  let { moment, shear } = inner;
+  let { moment } = inner;
+  let shear = inner.shear / corner;
   if (edge) {
     const lever = placedOn(id, deck, leverRule(girderOffsetsM, girder), 1);
     const least = Math.max(lever.vehicleFactor, rigid.vehicleFactor);

@@ -6,6 +6,10 @@ export function spansOf(unit: Unit): number[] {
   return unit.supportsM.slice(1).map((x, i) => x - unit.supportsM[i]!);
 }
 
+/** The skew a unit is sized for: none where the supports are square or nobody knows; + and - are mirror images. */
+export const skewOn = ({ skewDeg }: Pick<Site, 'skewDeg'>): Pick<UnitTask, 'skewDeg'> =>
+  skewDeg === null || skewDeg === 0 ? {} : { skewDeg: Math.abs(skewDeg) };
+
 /** What a unit of an option is asked to be, but for its depth and what it stands over. */
 export function askedTask(
   site: Site,
@@ -22,6 +26,7 @@ export function askedTask(
     deck: site.deck,
     standard: site.standard,
     planRadiusM: site.planRadiusM ?? Infinity,
+    ...skewOn(site),
     ...(isMain ? choices : {}),
     ...(unit.pylons ? { pylons: unit.pylons } : {}),
   };

@@ -2,6 +2,7 @@ import { formModule } from '../forms/index.ts';
 import type { Design, FormId, MeasuredLine, MethodId, Pattern, Site } from '../model/index.ts';
 import { leastOfTwoSpans, sideRatioWindow } from '../rules/index.ts';
 import { deckOnSupport } from '../substructure/index.ts';
+import { skewOn } from './askedTask.ts';
 import { meanClearance } from './meanClearance.ts';
 import { methodLines } from '../takeoff/index.ts';
 import { depthRange } from './depthRange.ts';
@@ -111,6 +112,7 @@ export function trialRows({ form, method }: FormAndMethod, makers: RowMakers): T
     deck: site.deck,
     standard: site.standard,
     planRadiusM: site.planRadiusM ?? Infinity,
+    ...skewOn(site),
     ...(formModule(form).ignoresHeight ? {} : { clearM: meanClearance(site) }),
     ...quakeOn(site, formModule(form)),
   };

@@ -74,6 +74,15 @@ export const designFigures: readonly Descriptor[] = [
     inputs: () => ({ radius: 'site/planRadiusM' }),
   }),
   described({
+    path: unit('task/skewDeg'),
+    label: 'skew the unit is sized for',
+    unit: 'deg',
+    method: 'as given',
+    formula: 'skew of the supports, either way',
+    inputs: () => ({ skew: 'site/skewDeg' }),
+    compute: ({ skew }) => Math.abs(skew),
+  }),
+  described({
     path: unit('task/clearUnderM/:s'),
     label: (at) => `height under the deck at support ${at.index('s') + 1}${name(at)}`,
     unit: 'm',

@@ -11,6 +11,8 @@ export interface UnitTask {
   readonly standard: StandardId;
   /** Plan radius, m; Infinity on a straight. */
   readonly planRadiusM: number;
+  /** Skew of the supports from square, degrees, above 0; absent where they are square or nobody knows. */
+  readonly skewDeg?: number;
   readonly method: MethodId;
   /** Structural depth at midspan, m. */
   readonly depthM: number;

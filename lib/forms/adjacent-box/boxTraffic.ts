@@ -1,4 +1,4 @@
-import { concrete, materials } from '../../actions/index.ts';
+import { closeBeamCorner, concrete, materials } from '../../actions/index.ts';
 import { bredt } from '../../mechanics/index.ts';
 import type { UnitTask } from '../../model/index.ts';
 import type { BeamChoice } from '../common/precast/beamChoice.ts';
@@ -48,5 +48,7 @@ export function boxTraffic(
   asked?: number,
 ): BeamTraffic {
   const { cellM2, aroundM } = boxCell(task, choice, composite.slabM);
-  return linkedTraffic(task, hingedBoxes(task, choice, composite), { cellM2, aroundM }, asked);
+  const deck = { spanM: Math.max(...task.spansM), depthM: task.depthM };
+  const corner = closeBeamCorner(deck, task.skewDeg ?? 0);
+  return linkedTraffic(task, hingedBoxes(task, choice, composite), { cellM2, aroundM }, corner, asked);
 }

@@ -1,4 +1,11 @@
-import { trafficOnDeck, trafficOnGirder, type TrafficLoad } from '../../actions/index.ts';
+import {
+  atObtuseCorner,
+  cellularCorner,
+  spreadBoxCorner,
+  trafficOnDeck,
+  trafficOnGirder,
+  type TrafficLoad,
+} from '../../actions/index.ts';
 import type { UnitTask } from '../../model/index.ts';
 import { bays } from '../composite-i/bracing.ts';
 import { modelOn, type GirderModel } from '../composite-i/girderModel.ts';
@@ -74,14 +81,22 @@ export function boxMiddles({ boxes, offsetsM }: TubLayout): number[] {
   return Array.from({ length: boxes }, (_, b) => (offsetsM[2 * b]! + offsetsM[2 * b + 1]!) / 2);
 }
 
-/** Traffic of the box that carries most: the whole deck on one, else shared out like girders. */
+/**
+ * Traffic of the box that carries most: the whole deck on one, else shared out like girders. Shears of a skew deck are those at
+ * its obtuse corner, by the factors of concrete boxes, which are borrowed: of spread boxes, and of a cellular deck for one.
+ */
 function worstBox(task: UnitTask, tubs: TubLayout): TrafficLoad {
   const { standard, deck } = task;
-  if (tubs.boxes === 1) return trafficOnDeck(standard, deck);
+  const { depthM, skewDeg = 0 } = task;
+  const spanM = Math.max(...task.spansM);
+  if (tubs.boxes === 1)
+    return atObtuseCorner(trafficOnDeck(standard, deck), cellularCorner({ spanM, depthM }, skewDeg));
   const lines = boxMiddles(tubs);
-  return lines
+  const spacingM = lines[1]! - lines[0]!;
+  const worst = lines
     .map((_, i) => trafficOnGirder(standard, deck, lines, i))
-    .reduce((worst, next) => (next.vehicleFactor > worst.vehicleFactor ? next : worst));
+    .reduce((most, next) => (next.vehicleFactor > most.vehicleFactor ? next : most));
+  return atObtuseCorner(worst, spreadBoxCorner({ spanM, depthM, spacingM }, skewDeg));
 }
 
 function halfOf(load: TrafficLoad): TrafficLoad {

@@ -215,6 +215,7 @@ function worstTraffic(
   const options = {
     spanM: Math.max(...task.spansM),
     slabM: slab.meanM,
+    skewDeg: task.skewDeg ?? 0,
     kgM4: girderStiffnessM4(modularRatio, inertiaM4, 2 * flangeM2 + webM2, armM),
   };
   const loads = lines.map((_, i) => trafficOnGirder(task.standard, task.deck, layout.offsetsM, i, options));

@@ -9,6 +9,8 @@ export function girderReactions(model: GirderModel, girder: SizedGirder): Suppor
   const { steelStage, superimposed, shrinkage, traffic, shortBeam } = girder.effects;
   const deck = trafficOnDeck(model.standardId, model.task.deck);
   const track = beamTrack(shortBeam);
+  // The whole deck weighs on its supports what it weighs: a skew only heaps it on the obtuse corners.
+  const inShear = model.traffic.shearRatio * (model.traffic.obtuse ?? 1);
   return model.supportsM.map((_, j) => {
     const line = reactionInfluence(shortBeam, j);
     const whole = trafficOnInfluence(deck, track, line);
@@ -19,8 +21,8 @@ export function girderReactions(model: GirderModel, girder: SizedGirder): Suppor
     return {
       permanentKN:
         (model.layout.count * permanent) / model.curve + model.layout.count * shrinkage.reactionKN[j]!,
-      trafficMaxKN: (traffic.reactionMaxKN[j]! / model.traffic.shearRatio) * ratio(whole.max, one.max),
-      trafficMinKN: (traffic.reactionMinKN[j]! / model.traffic.shearRatio) * ratio(whole.min, one.min),
+      trafficMaxKN: (traffic.reactionMaxKN[j]! / inShear) * ratio(whole.max, one.max),
+      trafficMinKN: (traffic.reactionMinKN[j]! / inShear) * ratio(whole.min, one.min),
     };
   });
 }

@@ -15,7 +15,9 @@ import { underSlabBarsKg, underSlabM3M } from './underSlab.ts';
  * hang on the drape.
  */
 export function boxReactions(model: BoxModel, box: SizedBox): SupportReaction[] {
-  const { most } = model.traffic;
+  const { most, load } = model.traffic;
+  // The whole deck weighs what it weighs: a skew only heaps it on the obtuse corners.
+  const { obtuse = 1 } = load;
   const gamma = model.standard.unitWeights.concreteKNm3;
   const last = model.supportsM.length - 1;
   // At the two ends the reaction is the shear beside it.
@@ -24,8 +26,8 @@ export function boxReactions(model: BoxModel, box: SizedBox): SupportReaction[] 
   return model.supportsM.map((_, j) => ({
     permanentKN:
       box.own.effects.reactionKN[j]! + model.superimposed.reactionKN[j]! + gamma * box.own.diaphragmM3[j]!,
-    trafficMaxKN: Math.max(most.reactionMaxKN[j]!, end(j)),
-    trafficMinKN: most.reactionMinKN[j]!,
+    trafficMaxKN: Math.max(most.reactionMaxKN[j]!, end(j)) / obtuse,
+    trafficMinKN: most.reactionMinKN[j]! / obtuse,
   }));
 }
 

@@ -1,4 +1,6 @@
 import {
+  atObtuseCorner,
+  cellularCorner,
   loadStandard,
   serviceTraffic,
   trafficEnvelope,
@@ -25,10 +27,12 @@ const kept = new Map<string, BoxTraffic>();
  * them; the last 32 units are kept.
  */
 export function boxTraffic(task: UnitTask, beam: LineBeam): BoxTraffic {
-  const key = JSON.stringify([task.standard, task.spansM, task.deck]);
+  // The factor falls with depth: what is kept for one depth of a skew deck is not that of another.
+  const corner = cellularCorner({ spanM: Math.max(...task.spansM), depthM: task.depthM }, task.skewDeg ?? 0);
+  const key = JSON.stringify([task.standard, task.spansM, task.deck, corner]);
   const known = kept.get(key);
   if (known) return known;
-  const made = trafficOnBox(beam, trafficOnDeck(task.standard, task.deck));
+  const made = trafficOnBox(beam, atObtuseCorner(trafficOnDeck(task.standard, task.deck), corner));
   if (kept.size >= 32) for (const [oldest] of [...kept].slice(0, 16)) kept.delete(oldest);
   kept.set(key, made);
   return made;

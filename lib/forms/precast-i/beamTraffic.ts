@@ -18,6 +18,7 @@ export function beamTraffic(
   const options = {
     spanM,
     slabM: composite.slabM,
+    skewDeg: task.skewDeg ?? 0,
     kgM4: girderStiffnessM4(modularRatio, shape.inertiaM4, shape.areaM2, armM),
   };
   if (girder !== undefined)

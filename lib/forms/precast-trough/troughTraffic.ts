@@ -1,4 +1,4 @@
-import { concrete, materials } from '../../actions/index.ts';
+import { concrete, materials, spreadBoxCorner } from '../../actions/index.ts';
 import { bredt } from '../../mechanics/index.ts';
 import type { UnitTask } from '../../model/index.ts';
 import type { BeamChoice } from '../common/precast/beamChoice.ts';
@@ -61,5 +61,8 @@ export function troughTraffic(
   asked?: number,
 ): BeamTraffic {
   const { cellM2, aroundM } = closedCell(task, choice, composite);
-  return linkedTraffic(task, linkedTroughs(task, choice, composite), { cellM2, aroundM }, asked);
+  const { spacingM } = choice.layout;
+  const deck = { spanM: Math.max(...task.spansM), depthM: task.depthM, spacingM };
+  const corner = spreadBoxCorner(deck, task.skewDeg ?? 0);
+  return linkedTraffic(task, linkedTroughs(task, choice, composite), { cellM2, aroundM }, corner, asked);
 }

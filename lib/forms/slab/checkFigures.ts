@@ -90,7 +90,8 @@ export const slabBridgeChecks: readonly Descriptor[] = [
   ...check(
     'shear',
     [
-      'gamma G permanent + gamma Q traffic in its strip - what inclined tendons carry, an effective depth off the support',
+      'gamma G permanent + gamma Q traffic in its strip - what inclined tendons carry, an effective depth off the support; traffic of a skew slab at its obtuse corner',
+      './task/skewDeg?',
       'vehicleShearWidthM',
       ...moments,
     ],

@@ -1,4 +1,5 @@
 import {
+  closeBeamCorner,
   loadStandard,
   trafficEnvelope,
   trafficOnDeck,
@@ -93,13 +94,18 @@ function deflections(task: UnitTask, beam: LineBeam, load: TrafficLoad): number[
   });
 }
 
-/** Traffic of a deck whose heaviest metre is loaded by `strips`; never less than an even share of the whole deck. */
+/**
+ * Traffic of a deck whose heaviest metre is loaded by `strips`; never less than an even share of the whole deck. Shears of a
+ * skew slab are those at its obtuse corner: AASHTO has no factor for slabs, so that of boxes side by side is borrowed. Its
+ * moments are those of its skew span, which is on the safe side (4.6.2.3 would take less).
+ */
 export function deckTraffic(task: UnitTask, beam: LineBeam, strips: WheelStrips): DeckTraffic {
   const { vehicle, uniform, load, laneKNm, deflection } = unitsOf(task, beam);
   const { sls } = loadStandard(task.standard).factors;
   const widthM = task.deck.widthM;
   const vehicles = Math.max(load.vehicleFactor, widthM / strips.vehicleWidthM);
   const inShear = Math.max(load.vehicleFactor, widthM / strips.shearWidthM);
+  const corner = closeBeamCorner({ spanM: Math.max(...task.spansM), depthM: task.depthM }, task.skewDeg ?? 0);
   const evenKNm = (laneKNm > 0 ? 0 : load.udlKNm) + load.footwayKNm;
   const uniformKNm = Math.max(evenKNm, widthM * strips.uniformKNm2);
   const combined = (v: number, q: number): MomentsAndShears => {
@@ -115,8 +121,10 @@ export function deckTraffic(task: UnitTask, beam: LineBeam, strips: WheelStrips)
         v * vehicles * vehicle.momentMaxKNm[i]! + q * uniformKNm * uniform.momentMaxKNm[i]!;
       out.momentMinKNm[i] =
         v * vehicles * vehicle.momentMinKNm[i]! + q * uniformKNm * uniform.momentMinKNm[i]!;
-      out.shearMaxKN[i] = v * inShear * vehicle.shearMaxKN[i]! + q * uniformKNm * uniform.shearMaxKN[i]!;
-      out.shearMinKN[i] = v * inShear * vehicle.shearMinKN[i]! + q * uniformKNm * uniform.shearMinKN[i]!;
+      out.shearMaxKN[i] =
+        corner * (v * inShear * vehicle.shearMaxKN[i]! + q * uniformKNm * uniform.shearMaxKN[i]!);
+      out.shearMinKN[i] =
+        corner * (v * inShear * vehicle.shearMinKN[i]! + q * uniformKNm * uniform.shearMinKN[i]!);
     }
     return out;
   };

@@ -1,4 +1,5 @@
 import {
+  atObtuseCorner,
   crossValue,
   leverRule,
   loadStandard,
@@ -22,7 +23,13 @@ export interface Cell {
  * shears by the lever rule where that is more (close to a support a wheel has no length over which to spread); torque from
  * the beam that is twisted most, so that all beams can be made alike.
  */
-export function linkedTraffic(task: UnitTask, beams: LinkedBeams, cell: Cell, asked?: number): BeamTraffic {
+export function linkedTraffic(
+  task: UnitTask,
+  beams: LinkedBeams,
+  cell: Cell,
+  corner: number,
+  asked?: number,
+): BeamTraffic {
   const { standard, deck } = task;
   const n = beams.offsetsM.length;
   const half = deck.carriagewayOffsetM === 0 ? Math.ceil(n / 2) : n;
@@ -55,7 +62,10 @@ export function linkedTraffic(task: UnitTask, beams: LinkedBeams, cell: Cell, as
   const lever =
     n > 1 ? trafficOnCrossLine(standard, deck, leverRule(beams.offsetsM, beam), weighKNm).vehicleFactor : 0;
   return {
-    load: { ...load, shearRatio: Math.max(1, lever / load.vehicleFactor), distribution: 'linked beams' },
+    load: atObtuseCorner(
+      { ...load, shearRatio: Math.max(1, lever / load.vehicleFactor), distribution: 'linked beams' },
+      corner,
+    ),
     torsion: { armM: Math.max(...torques.map(weigh)) / weigh(load), ...cell },
   };
 }

@@ -29,11 +29,13 @@ export function precastReactions(model: PrecastModel): SupportReaction[] {
   const deck = trafficOnDeck(task.standard, task.deck);
   const track = beamTrack(beam);
   const last = task.spansM.length;
+  // A skew heaps the load on the obtuse corners; the whole deck weighs what it weighs.
+  const inShear = traffic.shearRatio * (traffic.obtuse ?? 1);
   return model.supportsM.map((_, j) => {
     const line = reactionInfluence(beam, j);
     const whole = trafficOnInfluence(deck, track, line);
     const single = trafficOnInfluence(traffic, track, line);
-    const ratio = (all: number, part: number): number => (part === 0 ? 0 : all / part / traffic.shearRatio);
+    const ratio = (all: number, part: number): number => (part === 0 ? 0 : all / part / inShear);
     const diaphragm = gamma * (j === 0 || j === last ? one.endM3 : one.pierM3);
     return {
       permanentKN:
