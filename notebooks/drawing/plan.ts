@@ -42,6 +42,8 @@ interface Strip {
   readonly x: (chainageM: number) => number;
   readonly y: (acrossM: number) => number;
   readonly halfM: number;
+  /** Cosine of the skew: how far across the road a metre along the line of supports reaches. */
+  readonly cosSkew: number;
   /** Pixel of a chainage at a distance from the centre line, along a line parallel to what is crossed. */
   readonly skewed: (chainageM: number, acrossM: number) => readonly [number, number];
 }
@@ -62,6 +64,12 @@ function body(strip: Strip, atM: number, alongM: number, acrossM: number, offset
     [atM - alongM / 2, offsetM + acrossM / 2],
   ];
   return `M${corners.map(([x, y]) => strip.skewed(x, y).map(num).join(',')).join('L')}Z`;
+}
+
+/** Outline of a body with its faces along the line of supports: sizes square to that line and along it, m. */
+function standing(strip: Strip, atM: number, thickM: number, longM: number, offsetM = 0): string {
+  const { cosSkew } = strip;
+  return body(strip, atM, thickM / cosSkew, longM * cosSkew, offsetM * cosSkew);
 }
 
 /** Short strokes on the water side of a bank, longer and shorter by turns. */
@@ -152,8 +160,8 @@ function piles(strip: Strip, atM: number, foundation: Foundation): Piece | null 
   const circles: Piece[] = [];
   let crosses = '';
   for (let i = 0; i < count; i += 1) {
-    const x = atM + ((i % along) - (along - 1) / 2) * pitch(lengthM, along);
-    const y = (Math.floor(i / along) - (rows - 1) / 2) * pitch(widthM, rows);
+    const x = atM + (((i % along) - (along - 1) / 2) * pitch(lengthM, along)) / strip.cosSkew;
+    const y = (Math.floor(i / along) - (rows - 1) / 2) * pitch(widthM, rows) * strip.cosSkew;
     const [cx, cy] = strip.skewed(x, y);
     const r = (diameterM / 2) * strip.ppm;
     circles.push(el('circle', { cx, cy, r }));
@@ -173,7 +181,7 @@ function supportPiece(strip: Strip, support: Support): Piece {
   const { chainageM: at, shaft } = support;
   const pitch = shaft.columns > 1 ? shaft.widthM / shaft.columns : 0;
   const columns = Array.from({ length: Math.max(1, shaft.columns) }, (_, i) =>
-    body(
+    standing(
       strip,
       at,
       shaft.lengthM,
@@ -186,7 +194,7 @@ function supportPiece(strip: Strip, support: Support): Piece {
     strip.ppm > FOUNDED_PX &&
       foundation !== null &&
       el('path', {
-        d: body(strip, at, foundation.footing.lengthM, foundation.footing.widthM),
+        d: standing(strip, at, foundation.footing.lengthM, foundation.footing.widthM),
         'stroke-width': pens.fine,
         'stroke-dasharray': '4.6 2.8',
       }),
@@ -250,6 +258,7 @@ export function plan(input: PlanInput): Piece {
     x: frame.x,
     y,
     halfM,
+    cosSkew: Math.cos(Math.atan(lean)),
     skewed: (chainageM, acrossM) => [frame.x(chainageM + acrossM * lean), y(acrossM)],
   };
   const ink = formInk(input.paper ?? 'colour', option?.units.map((unit) => unit.form) ?? [], prefix);

@@ -25,7 +25,7 @@ const amount = ({ lines }: Design, isOf: (item: string) => boolean): number =>
   lines.reduce((sum, { item, quantity }) => (isOf(item) ? sum + quantity : sum), 0);
 const metal = (design: Design): number =>
   amount(design, (item) => item.endsWith('-steel') || item === 'reinforcement');
-const concrete = (design: Design): number => amount(design, (item) => item === 'deck-concrete');
+const concrete = (design: Design): number => amount(design, (item) => item.endsWith('concrete'));
 
 describe.each(units)('size(%s) of a skew deck', (form, spansM, depthM) => {
   it('is that of a square one to the last digit at 0', () => {
