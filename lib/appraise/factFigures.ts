@@ -67,7 +67,12 @@ export const factFigures: readonly Descriptor[] = [
   ),
   asIs('deckWidthM', () => ({ width: 'site/deck/widthM' })),
   fact('planRadiusM', factOf('planRadiusM').meaning, () => ({ radius: 'site/planRadiusM' })),
-  asIs('skewDeg', () => ({ skew: 'site/skewDeg' })),
+  fact(
+    'skewDeg',
+    factOf('skewDeg').meaning,
+    () => ({ skew: 'site/skewDeg' }),
+    ({ skew }) => Math.abs(skew),
+  ),
   fact('continuity', 'continuous over inner supports, simple between two', (at) => ({
     spans: mainSpans(at),
   })),

@@ -22,7 +22,7 @@ export function formFacts(site: Site): Facts {
     mainSpanM: site.mainOpening ? site.mainOpening.widthM + 2 * PIER_HALF_WIDTH_M : 'unknown',
     deckWidthM: site.deck.widthM,
     planRadiusM: site.planRadiusM ?? 'unknown',
-    skewDeg: site.skewDeg ?? 'unknown',
+    skewDeg: site.skewDeg === null ? 'unknown' : Math.abs(site.skewDeg),
   };
 }
 

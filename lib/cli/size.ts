@@ -24,6 +24,7 @@ const flagNames = [
   'haunch',
   'carriageway',
   'radius',
+  'skew',
   'loading',
   'girders',
   'box-width',
@@ -37,6 +38,8 @@ const flagNames = [
 const FLATTEST_M = 0.01;
 const DEEPEST_M = 40;
 const SURFACING_M = 0.09;
+/** Published factors of skew decks end here. */
+const MOST_SKEW_DEG = 60;
 /** Barriers take what the carriageway leaves of the width, half on each side. */
 const BARRIERS_M = 1;
 /** No traffic lane is marked narrower, m (common practice, no source). */
@@ -184,6 +187,18 @@ function readTask(argv: readonly string[]): Asked {
     numberFlag(flags, 'haunch', { above: 1, most: 4, unit: 'times the midspan depth' }, problems) ?? 1;
   const carriagewayM = metres('carriageway', 60) ?? (widthM === undefined ? undefined : widthM - BARRIERS_M);
   const planRadiusM = metres('radius', 1e6) ?? Infinity;
+  // Either way: + and - are mirror images.
+  const skewDeg = Math.abs(
+    numberFlag(flags, 'skew', { above: -MOST_SKEW_DEG, most: MOST_SKEW_DEG, unit: 'degrees' }, problems) ?? 0,
+  );
+  if (form && skewDeg > 0 && !formModule(form).readsSkew)
+    problems.push({
+      code: 'unknown-key',
+      path: ['--skew'],
+      expected: `a form that reads it: ${sizeableForms.filter((id) => formModule(id).readsSkew).join(', ')}`,
+      received: form,
+      remedy: 'leave --skew out; its deck is sized as square',
+    });
   const girders = numberFlag(
     flags,
     'girders',
@@ -258,6 +273,7 @@ function readTask(argv: readonly string[]): Asked {
     deck: deckSpec(strips, SURFACING_M, standard),
     standard,
     planRadiusM,
+    ...(skewDeg > 0 ? { skewDeg } : {}),
     method: module.methods[0],
     ...(girders === undefined ? {} : { girders }),
     ...choices,
@@ -317,6 +333,7 @@ function designOf(asked: Asked): Design {
 
 /**
  * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
+ * `--skew` is the skew of the supports from square, degrees, either way; spans are those along the road.
  * Without a depth the one of least cost in the published band is taken. Concrete boxes read `--box-width`
  * (between the axes of the outer webs, m), `--strength` (MPa), `--light` (oven-dry density, kg/m3; with `--light-middles`
  * only a length about the middle of each span, m), and `--ballast` (kN/m by span); cantilevered ones `--cast-in` (piers in

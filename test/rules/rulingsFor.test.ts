@@ -81,6 +81,8 @@ describe('rulingsFor(askedOf, form, facts)', () => {
       upliftKN: 412.4,
     });
     const because = (id: string) => by(spoken, id)?.because[0];
+    expect(because('skew-acute-corner')).toMatch(/^skew 50°; over 30° the acute corners may lift/u);
+    expect(because('skew-beyond-factors')).toBeUndefined();
     expect(because('skew-high')).toMatch(/^skew 50°; over 45° /u);
     expect(because('budget-chance')).toMatch(/^15 % chance .* under 20 % /u);
     expect(because('end-uplift')).toMatch(/^412 kN of uplift/u);

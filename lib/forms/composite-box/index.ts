@@ -30,6 +30,7 @@ export const compositeBox: FormModule = {
   name: 'Composite box girders',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
+  readsSkew: true,
   size,
 };
 

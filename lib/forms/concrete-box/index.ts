@@ -26,6 +26,7 @@ export const concreteBox: FormModule = {
   name: 'Concrete box',
   pattern: { kind: 'continuous' },
   methods: ['falsework', 'launch'],
+  readsSkew: true,
   choices: boxChoices,
   faults: boxFaults,
   variants: (spansM, deck, method) =>

@@ -22,6 +22,7 @@ export const slab: FormModule = {
   name: 'Slab',
   pattern: { kind: 'continuous' },
   methods: ['falsework'],
+  readsSkew: true,
   size,
 };
 
