@@ -218,6 +218,20 @@ export const designFigures: readonly Descriptor[] = [
     inputs: (at) => ({ midspan: `${at.unit}/depthM/midspan` }),
   }),
   described({
+    path: unit('obtuseCorner'),
+    label: (at) => `traffic on the bearing at an obtuse corner over that of a square deck${name(at)}`,
+    unit: '',
+    method: 'factor by kind of deck',
+    formula:
+      'AASHTO LRFD table 4.6.2.2.3c-1: 1 + share by span, depth and girders x tan of the skew, at most 60 degrees',
+    inputs: (at) => ({
+      skew: `${at.unit}/task/skewDeg`,
+      spans: spans(at),
+      depth: `${at.unit}/task/depthM`,
+    }),
+    sources: ['AASHTO LRFD 4.6.2.2.3c (from memory)'],
+  }),
+  described({
     path: unit('reactions/:s/:field'),
     label: (at) => `${loadWords[at.name('field')]} reaction at support ${at.index('s') + 1}${name(at)}`,
     unit: 'kN',

@@ -192,6 +192,8 @@ export interface Design {
   readonly elevation: readonly Shape[];
   readonly sections: readonly SectionCut[];
   readonly reactions: readonly SupportReaction[];
+  /** What traffic puts on the bearing at an obtuse corner over that of a square deck, above 1; absent on a square deck and where the form has no figure for it. */
+  readonly obtuseCorner?: number;
   /** Walls in one with the deck; absent where it rests on bearings. */
   readonly walls?: readonly IntegralWall[];
   /** Piers in one with the deck; absent where it rests on bearings. */

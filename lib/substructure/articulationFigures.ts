@@ -151,14 +151,19 @@ export const articulationFigures: readonly Descriptor[] = [
         : `design load of all bearings, ${supportName(at)}`,
     unit: 'MN',
     method: 'factored sum',
-    formula: '(gamma G x permanent + gamma Q x traffic) / 1000',
+    formula:
+      '(gamma G x permanent + gamma Q x traffic x obtuse corner) / 1000: on a skew all bearings are made like the one there',
     inputs: (at) => ({
       permanent: `${at.foot}/permanentKN`,
       traffic: `${at.foot}/trafficKN`,
+      corners: unitsAt(at).flatMap(({ unit, path }) =>
+        at.option.designs[unit]!.obtuseCorner === undefined ? [] : [`${path}/obtuseCorner`],
+      ),
       gammaG: factor('permanent'),
       gammaQ: factor('traffic'),
     }),
-    compute: (v) => Math.max(0, v.gammaG * v.permanent + v.gammaQ * v.traffic) / 1000,
+    compute: (v) =>
+      Math.max(0, v.gammaG * v.permanent + v.gammaQ * Math.max(1, ...v.corners) * v.traffic) / 1000,
   }),
   described({
     path: support('articulation/acrossKN'),

@@ -14,7 +14,7 @@ import type { SupportAsk } from './supportAsk.ts';
 import {
   articulationLines,
   articulationOf,
-  bearingLoadMN,
+  designLoadMN,
   shaftLines,
   softZoneLines,
   waterAccessLines,
@@ -35,7 +35,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
   const slim = Math.max(pier.leastLeafM, shaftHeightM / 12);
   const windKN = wind.pressureKNm2 * slim * heightM;
   const wet = setting.floodDepthM > 0 || setting.impact !== null;
-  const designMN = bearingLoadMN(ask);
+  const designMN = designLoadMN(ask);
   const pylon = ask.pylon;
   const hollow = shaftHeightM > pier.hollowAboveM;
   const framedBy = (lengthM: number): FramedShaft | null =>

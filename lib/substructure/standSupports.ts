@@ -100,6 +100,7 @@ function askAt(
   const deepest = Math.max(...meetings.map(({ design, at }) => depthOver(design, at)));
   const reaction = (key: 'permanentKN' | 'trafficMaxKN' | 'trafficMinKN'): number =>
     meetings.reduce((sum, { design, at }) => sum + design.reactions[at]![key], 0);
+  const corners = meetings.flatMap(({ design: { obtuseCorner } }) => obtuseCorner ?? []);
   const carrier = meetings.find(({ design, at }) => design.task.pylons?.includes(at));
   const pylon = carrier ? { pylon: pylonFoot(carrier.design, roadLevelM - groundAt(site, chainageM)) } : {};
   const integral = meetings
@@ -124,6 +125,7 @@ function askAt(
     roadLevelM,
     soffitLevelM: roadLevelM - constructionDepth(site.deck, deepest),
     ...loads,
+    ...(corners.length > 0 ? { obtuseCorner: Math.max(...corners) } : {}),
     // Fixed points of two units add; sliding bearings of two units push apart, so the larger counts.
     alongKN: integral
       ? Math.max(...integral.loads.map(({ alongKN, struck }) => (struck ? 0 : Math.abs(alongKN))))

@@ -15,6 +15,8 @@ export interface SupportAsk {
   readonly permanentKN: number;
   /** Greatest traffic reaction. */
   readonly trafficKN: number;
+  /** What traffic puts on the bearing at an obtuse corner over that of a square deck; 1 when absent. */
+  readonly obtuseCorner?: number;
   /** Least traffic reaction; negative = uplift. */
   readonly trafficLeastKN: number;
   /** While its arms stand free: moment of one arm ahead of the other, kNm, and what it carries then, kN. */

@@ -3,11 +3,15 @@ import { bearingKind } from './bearingKind.ts';
 import { substructureData } from './data.ts';
 import type { SupportAsk } from './supportAsk.ts';
 
-/** Design vertical load of the bearings of a support, MN: permanent and traffic with their factors. */
-export function bearingLoadMN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficKN'>): number {
+/** Design vertical load of a support, MN: permanent and traffic with their factors. */
+export function designLoadMN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficKN'>): number {
   const { permanent, traffic } = substructureData.factors;
   return Math.max(0, permanent * ask.permanentKN + traffic * ask.trafficKN) / 1000;
 }
+
+/** Design load of the bearings of a support, MN: on a skew all are made like the one at the obtuse corner. */
+const bearingLoadMN = (ask: Pick<SupportAsk, 'permanentKN' | 'trafficKN' | 'obtuseCorner'>): number =>
+  designLoadMN({ ...ask, trafficKN: (ask.obtuseCorner ?? 1) * ask.trafficKN });
 
 /** Design uplift, kN, 0 where the support stays pressed: 0.95 of the permanent load against the factored least traffic. */
 export function upliftKN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficLeastKN'>): number {

@@ -60,6 +60,19 @@ it('standSupports(skew) asks for more of everything above the foundations as the
   }
 });
 
+it('standSupports(obtuse corner 1.2) prices bearings for 1.2 of their traffic and leaves shafts and foundations', () => {
+  const units = [unitOn([0, 60, 140, 200])];
+  const [square, corner] = [{}, { obtuseCorner: 1.2 }].map(
+    (more) => standSupports(dry, units, [{ ...plainDesign([60, 80, 60]), ...more }], profile)[1]!,
+  );
+  // 1.35 x 130 x 70 + 1.35 x 1.2 x (50 x 70 + 600), by hand.
+  expect(square!.articulation.bearingMN).toBeCloseTo((1.35 * 9100 + 1.35 * 4100) / 1000, 9);
+  expect(corner!.articulation.bearingMN).toBeCloseTo((1.35 * 9100 + 1.35 * 1.2 * 4100) / 1000, 9);
+  expect(sum([corner!], 'bearing')).toBeGreaterThan(sum([square!], 'bearing'));
+  expect(corner!.shaft).toEqual(square!.shaft);
+  expect(corner!.foundations).toEqual(square!.foundations);
+});
+
 it('standSupports(skew) widens the head over two columns by 1 / cos', () => {
   const [square, skewed] = [stood(0)[1]!, stood(60)[1]!];
   expect(square.shaft.columns).toBe(2);

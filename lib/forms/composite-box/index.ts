@@ -2,6 +2,7 @@ import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
+import { obtuseOf } from '../common/obtuse.ts';
 import { overLimit } from '../common/warnings.ts';
 import { heaviestPiece } from '../composite-i/girderChecks.ts';
 import { girderElevation } from '../composite-i/girderDrawing.ts';
@@ -64,6 +65,7 @@ function sizeWith(task: UnitTask, lean: number): Design {
     elevation: girderElevation(model, girder.run),
     sections: boxGirderSections(model, girder.run),
     reactions,
+    ...obtuseOf(model.traffic),
     checks,
     limitingCheck: limiting(checks),
     ownWeightShare: ownWeightShare(girder),

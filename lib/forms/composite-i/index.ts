@@ -1,6 +1,7 @@
 import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
+import { obtuseOf } from '../common/obtuse.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { girderChecks, heaviestPiece } from './girderChecks.ts';
@@ -48,6 +49,7 @@ function size(task: UnitTask): Design {
     elevation: girderElevation(model, girder.run),
     sections: girderSections(model, girder.run, girder.secondary.crossGirderM),
     reactions: girderReactions(model, girder),
+    ...obtuseOf(model.traffic),
     checks,
     limitingCheck: limiting(checks),
     ownWeightShare: ownWeightShare(girder),

@@ -3,6 +3,7 @@ import { depthBand } from '../../rules/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
+import { obtuseOf } from '../common/obtuse.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { boxChecks } from './boxChecks.ts';
@@ -58,6 +59,7 @@ function size(task: UnitTask): Design {
     elevation: boxElevation(model, box),
     sections: boxSections(model, box),
     reactions: boxReactions(model, box),
+    ...obtuseOf(model.traffic.load),
     checks,
     limitingCheck: limiting(checks),
     ownWeightShare: ownWeightShare(model, box),

@@ -27,6 +27,8 @@ export interface DeckTraffic {
   /** Of the whole deck with all its lanes, kN. */
   readonly reactionMaxKN: Float64Array;
   readonly reactionMinKN: Float64Array;
+  /** What shears grow by at an obtuse corner; absent on a square deck. */
+  readonly obtuse?: number;
   /** Moments of the whole deck over those of its heaviest metre times the width, at midspan of the longest span. */
   readonly evenShare: number;
   /** Of the whole deck at the middle of each span on stiffness 1, m x kNm2. */
@@ -140,6 +142,7 @@ export function deckTraffic(task: UnitTask, beam: LineBeam, strips: WheelStrips)
   const middle = (beam.supportAt[longest]! + beam.supportAt[longest + 1]!) >> 1;
   return {
     most,
+    ...(corner === 1 ? {} : { obtuse: corner }),
     service: combined(sls.vehicle, laneKNm > 0 ? sls.footway : sls.uniform),
     reactionMaxKN: Float64Array.from({ length: last + 1 }, (_, j) => reaction(j)),
     reactionMinKN: Float64Array.from(

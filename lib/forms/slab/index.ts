@@ -2,6 +2,7 @@ import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
+import { obtuseOf } from '../common/obtuse.ts';
 import { overLimit } from '../common/warnings.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
@@ -44,6 +45,7 @@ function size(task: UnitTask): Design {
     elevation: slabElevation(model, sized),
     sections: slabSectionCuts(model, sized),
     reactions: slabReactions(model),
+    ...obtuseOf(model.traffic),
     checks,
     limitingCheck: limiting(checks),
     ownWeightShare: ownWeightShare(model),

@@ -2,6 +2,7 @@ import type { Check, Design, MeasuredLine, Shape, UnitTask } from '../../../mode
 import { checkUnitTask } from '../checkUnitTask.ts';
 import { limiting } from '../checks.ts';
 import { constantDepth } from '../depthAlong.ts';
+import { obtuseOf } from '../obtuse.ts';
 import { overLimit } from '../warnings.ts';
 import type { BeamChoice } from './beamChoice.ts';
 import { heaviestBeam, precastChecks } from './precastChecks.ts';
@@ -54,6 +55,7 @@ export function sizePrecast(form: PrecastForm, task: UnitTask): Design {
     ),
     sections: precastSections(model, form.extraShapes?.(model) ?? []),
     reactions: precastReactions(model),
+    ...obtuseOf(model.traffic),
     checks,
     limitingCheck: worst,
     ownWeightShare: ownWeightShare(model),

@@ -5,6 +5,7 @@ import type { BeamChoice } from '../../common/precast/beamChoice.ts';
 import { heaviestBeam } from '../../common/precast/precastChecks.ts';
 import { precastElevation, precastSections, structuralDepthM } from '../../common/precast/precastDrawing.ts';
 import { pretensioned } from '../../common/precast/pretensioned.ts';
+import { obtuseOf } from '../../common/obtuse.ts';
 import { overLimit } from '../../common/warnings.ts';
 import { heightUnder } from '../../concrete-box/heightUnder.ts';
 import { rankedChoices } from '../chooseBeams.ts';
@@ -56,6 +57,7 @@ export function sizeSpliced(task: UnitTask): Design {
     ],
     sections: precastSections(model, []),
     reactions: splicedReactions(model, all),
+    ...obtuseOf(model.traffic),
     checks,
     limitingCheck: worst,
     ownWeightShare: own / (own + superimposed.momentKNm[middle]! + most.momentMaxKNm[middle]!),
