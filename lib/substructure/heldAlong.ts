@@ -134,7 +134,7 @@ function byFrame(on: UnitOnGround, castIn: readonly CastInPier[]): HeldAlong {
   const heights = pierHeights(on);
   const stiffnessKNm = unit.supportsM.map((_, i) => {
     const pier = castIn.find(({ support }) => support === i);
-    return pier ? framedStiffness(site.deck.widthM, heights[i]!, pier.deckTurnKNm) : 0;
+    return pier ? framedStiffness(alongSupportsM(site), heights[i]!, pier.deckTurnKNm) : 0;
   });
   return { stiffnessKNm, stillM: stillAt(unit.supportsM, stiffnessKNm), afloat: false };
 }

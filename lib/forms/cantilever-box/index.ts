@@ -2,6 +2,7 @@ import type { Design, Problem, UnitTask } from '../../model/index.ts';
 import { midspanDepthBand } from '../../rules/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
+import { curveWarning } from '../common/curveWarning.ts';
 import { overLimit } from '../common/warnings.ts';
 import { boxFaults, refuse } from '../concrete-box/boxFaults.ts';
 import { boxChoices, wideBoxVariants } from '../concrete-box/boxVariants.ts';
@@ -50,6 +51,12 @@ function size(task: UnitTask): Design {
   const reactions = haunchedReactions(model, box);
   const castIn = haunchedCastIn(model, box);
   const warnings = [...overLimit(checks, 'tendons and concrete'), ...haunchedWarnings(model, box)];
+  warnings.push(
+    ...curveWarning(
+      task,
+      'its webs carry the torque of the curve, but uplift of its bearings and overturning are not checked.',
+    ),
+  );
   if (!heightUnder(task).known)
     warnings.push(
       `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).assumedRoadM} m above ground.`,

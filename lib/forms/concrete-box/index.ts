@@ -4,6 +4,7 @@ import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
 import { obtuseOf } from '../common/obtuse.ts';
+import { curveWarning } from '../common/curveWarning.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { boxChecks } from './boxChecks.ts';
@@ -48,6 +49,12 @@ function size(task: UnitTask): Design {
   const box = sizeBox(model);
   const checks = boxChecks(model, box);
   const warnings = overLimit(checks, 'tendons and concrete');
+  warnings.push(
+    ...curveWarning(
+      task,
+      'its webs carry the torque of the curve, but uplift of its bearings and overturning are not checked.',
+    ),
+  );
   if (task.method !== 'launch' && !heightUnder(task).known)
     warnings.push(
       `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).assumedRoadM} m above ground.`,

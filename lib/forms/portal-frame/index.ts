@@ -1,6 +1,7 @@
 import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
+import { curveWarning } from '../common/curveWarning.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { frameChecks } from './frameChecks.ts';
@@ -46,6 +47,7 @@ function size(task: UnitTask): Design {
   const sized = sizeFrame(model);
   const checks = frameChecks(model, sized);
   const warnings = overLimit(checks, model.prestressed ? 'tendons and bars' : 'bars');
+  warnings.push(...curveWarning(task, 'all its figures are those of a straight deck.'));
   if (task.clearUnderM === undefined)
     warnings.push(
       `Height under the deck is not given: walls are sized for ${portalData.leg.assumedClearM} m under the soffit.`,

@@ -3,6 +3,7 @@ import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
 import { obtuseOf } from '../common/obtuse.ts';
+import { curveWarning } from '../common/curveWarning.ts';
 import { overLimit } from '../common/warnings.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
@@ -34,6 +35,7 @@ function size(task: UnitTask): Design {
   const sized = sizeSlab(model);
   const checks = slabChecks(model, sized);
   const warnings = overLimit(checks, model.prestressed ? 'tendons and bars' : 'bars');
+  warnings.push(...curveWarning(task, 'all its figures are those of a straight deck.'));
   if (!heightUnder(task).known)
     warnings.push(
       `Height under the deck is not given: falsework is measured for a road ${heightUnder(task).assumedRoadM} m above ground.`,
