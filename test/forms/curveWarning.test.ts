@@ -1,6 +1,5 @@
 import { expect, it } from 'vitest';
 import { formModule } from '../../lib/forms/index.ts';
-import type { FormId } from '../../lib/model/index.ts';
 import { girderTask } from './composite-i/cases.ts';
 
 it.each([
@@ -13,7 +12,7 @@ it.each([
   (form, spansM, depthM, says) => {
     const turning = (degrees: number): string => {
       const planRadiusM = (Math.max(...spansM) * 180) / Math.PI / degrees;
-      const method = formModule(form as FormId).methods[0];
+      const method = formModule(form).methods[0];
       return formModule(form)
         .size({ ...girderTask(spansM, depthM, { planRadiusM }), form, method })
         .warnings.join(' ');
