@@ -55,6 +55,17 @@ describe.each(units)('size(%s) of a skew deck', (form, spansM, depthM) => {
   });
 });
 
+it('size(portal-frame) makes its walls twice as long at 60 degrees, and leaves its deck', () => {
+  const at = (skewDeg: number) => {
+    const { lines } = sized('portal-frame', [18], 0.9, { skewDeg });
+    const of = (what: string): number => lines.find((line) => line.what === what)!.quantity;
+    return { wall: of('first wall'), upright: of('first wall upright'), deck: of('frame deck') };
+  };
+  expect(at(60).wall).toBeCloseTo(2 * at(0).wall, 9);
+  expect(at(60).upright).toBeCloseTo(2 * at(0).upright, 6);
+  expect(at(60).deck).toBe(at(0).deck);
+});
+
 it('skewOn(site) gives a unit its skew either way, none on square supports and where nobody knows', () => {
   expect(skewOn({ skewDeg: -20 })).toEqual({ skewDeg: 20 });
   expect(skewOn({ skewDeg: 20 })).toEqual({ skewDeg: 20 });

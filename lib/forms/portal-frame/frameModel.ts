@@ -1,6 +1,7 @@
 import { concrete, loadStandard, materials, type Concrete, type LoadStandard } from '../../actions/index.ts';
 import { frameEffects, planeFrame, type FrameEffects, type FrameLoad } from '../../mechanics/index.ts';
 import type { StandardId, UnitTask, WallLoad } from '../../model/index.ts';
+import { cosineOfSkew } from '../../site/skew.ts';
 import { pressureAt, pressureOnNodes, ratchetPressure } from './earth.ts';
 import { frameShape, type FrameShape } from './frameShape.ts';
 import { portalData } from './portalData.ts';
@@ -100,6 +101,8 @@ export function frameModel(task: UnitTask): FrameModel {
   const deckNodes = range(knees[0], knees[1]);
   const gamma = standard.unitWeights.concreteKNm3;
   const widthM = deck.widthM;
+  // Walls stand along the line of supports; the plane frame is that of a square deck of the spans along the road.
+  const wallM = widthM / cosineOfSkew(task.skewDeg ?? null);
   const n = nodes.length;
 
   const inDeck = Float64Array.from(members, ([i]) => (i >= knees[0] && i < knees[1] ? 1 : 0));
@@ -212,7 +215,7 @@ export function frameModel(task: UnitTask): FrameModel {
     deckNodes,
     deckXM: Float64Array.from(deckNodes, (i) => nodes[i]![0]),
     deckM3: deckVolume(shape),
-    wallM3: walls.map(({ topM, footM, heightM }) => ((topM + footM) / 2) * (heightM - shape.kneeM) * widthM),
+    wallM3: walls.map(({ topM, footM, heightM }) => ((topM + footM) / 2) * (heightM - shape.kneeM) * wallM),
     cases: [caseOf('stiff'), caseOf('soft')],
   };
 }

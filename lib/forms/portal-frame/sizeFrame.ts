@@ -1,3 +1,4 @@
+import { cosineOfSkew } from '../../site/skew.ts';
 import { barMassKg } from '../slab/barsAcross.ts';
 import { barDesignMPa } from '../common/bars.ts';
 import { slabData } from '../common/slab/slabData.ts';
@@ -53,11 +54,13 @@ export function sizeFrame(model: FrameModel): SizedFrame {
       across.highM2PerM * task.deck.widthM +
       2 * 2.5 * shape.wingM * Math.max(0, shape.wingBarsM2PerM - across.highM2PerM)) *
     lengthM;
+  // On a skew the walls are longer than the deck is wide.
+  const longer = 1 / cosineOfSkew(task.skewDeg ?? null);
   const wallBarsKg = shape.walls.map(({ name }, w) => {
     const [outer, inner] = wallFaces(name);
-    const links = shear.walls.linksM3 / shape.walls.length;
+    const links = (longer * shear.walls.linksM3) / shape.walls.length;
     return {
-      upright: barMassKg(volume(outer) + volume(inner)),
+      upright: longer * barMassKg(volume(outer) + volume(inner)),
       level:
         barMassKg(portalData.wallAcross.ratio * model.wallM3[w]! + links) + detailsKgM3 * model.wallM3[w]!,
     };
