@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { formModule } from '../../lib/forms/index.ts';
+import { skewOn } from '../../lib/appraise/askedTask.ts';
 import { workbench, type MeasuredLine, type Workbench } from '../../lib/index.ts';
 import { meanClearance } from '../../lib/appraise/meanClearance.ts';
 import { trialSpans } from '../../lib/appraise/trialSpans.ts';
@@ -48,6 +49,7 @@ describe('cost table of portal frames of two spans', () => {
       standard: site.standard,
       planRadiusM: Infinity,
       clearUnderM: [clearM, clearM, clearM],
+      ...skewOn(site),
       spansM,
       depthM: table.depthM('portal-frame', longM),
     });

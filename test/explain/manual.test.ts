@@ -45,8 +45,13 @@ function numbersIn(value: unknown, path: string, by?: string): string[] {
   });
 }
 
-// A spare that is nought is what rounding leaves of two levels: 1e-12 m either way is the same nought.
-const relative = (a: number, b: number): number => Math.abs(a - b) / Math.max(Math.abs(a), Math.abs(b), 1e-3);
+/** What rounding leaves of two equal levels, 1e-12 m either way, is nought. */
+const NOUGHT = 1e-9;
+
+function relative(a: number, b: number): number {
+  const most = Math.max(Math.abs(a), Math.abs(b));
+  return most < NOUGHT ? 0 : Math.abs(a - b) / most;
+}
 
 describe.each(contexts)('explanations of %s', (_name, asked, least) => {
   it('figure(path) stands behind every number of the appraisal', { timeout: 60_000 }, () => {
