@@ -35,7 +35,10 @@ describe('option study', () => {
     const before = await ranking(page);
     await type(page, 'no-pier width', '80');
     await page.waitForFunction(() => document.querySelector('#s2')?.textContent.includes('83 m asks'));
-    await page.waitForFunction(() => document.querySelector('.ranking tbody tr')?.textContent.includes('83'));
+    // Girders and boxes with 83 to 85 m lie within 1 % of each other: either may lead.
+    await page.waitForFunction(() =>
+      /\b8[345](\.\d)?\b/u.test(document.querySelector('.ranking tbody tr')?.textContent ?? ''),
+    );
     expect(await ranking(page)).not.toEqual(before);
   });
 
