@@ -170,6 +170,8 @@ export function takeHold(root: Element, desk: HandDesk): HTMLElement {
     handle.element.classList.add('held');
     box.focus();
     if (first === null) box.select();
+    // Else the caret would stand before the digit that opened it.
+    else box.setSelectionRange(first.length, first.length);
   };
 
   draggable(root, {
