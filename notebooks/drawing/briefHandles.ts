@@ -2,9 +2,11 @@ import { fixed, level } from '../format.ts';
 import type { Obstacle, Site } from '../model.ts';
 import { groundLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
-import { handle } from './handle.ts';
+import { bracketWords } from './clearances.ts';
+import { handle, typedFigure } from './handle.ts';
 import type { Hold } from './hold.ts';
-import { colours, pens } from './ink.ts';
+import { colours, letters, pens } from './ink.ts';
+import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 
@@ -17,6 +19,80 @@ const wasAt = (x: number, y: number, isUp: boolean): Piece =>
     'stroke-dasharray': '5 3',
   });
 
+/** An end of an obstacle. */
+type End = 'from' | 'to';
+
+/** Handle of an edge of an obstacle, at a height y; null off the drawing. */
+function edgeHandle(
+  site: Site,
+  [index, { name, fromM, toM }]: readonly [number, Obstacle],
+  end: End,
+  frame: Frame,
+  y: number,
+  hold: Hold | null,
+): Piece | null {
+  const at = end === 'from' ? fromM : toM;
+  if (at < frame.fromM || at > frame.toM) return null;
+  const key = `obstacle/${String(index)}/${end}`;
+  return handle(
+    {
+      key,
+      name: `${name}, ${end} chainage`,
+      valueM: at,
+      leastM: end === 'from' ? site.startM - 500 : fromM + 0.5,
+      mostM: end === 'from' ? toM - 0.5 : site.endM + 500,
+      places: 1,
+      words: `ch ${fixed(at, 1)}`,
+      perPx: [1 / frame.pxPerM, 0],
+      x: frame.x(at),
+      y,
+      before: hold?.key === key ? wasAt(frame.x(hold.valueM), y, false) : null,
+    },
+    hold,
+  );
+}
+
+/**
+ * What a small drawing lets be taken hold of: the edges of the main opening at their bracket, on a level line at y, and its
+ * width where one obstacle alone makes it.
+ */
+export function openingHandles(
+  site: Site,
+  obstacles: readonly Obstacle[],
+  frame: Frame,
+  y: number,
+  hold: Hold | null,
+): Piece | null {
+  const opening = site.mainOpening;
+  if (opening === null) return null;
+  const ends = [...obstacles.entries()]
+    .filter(([, { supports }]) => supports === 'hard')
+    .map((entry) => ({
+      entry,
+      edges: (['from', 'to'] as const).filter((end) => entry[1][`${end}M`] === opening[`${end}M`]),
+    }));
+  const whole = ends.find(({ edges }) => edges.length === 2)?.entry;
+  const words = bracketWords(site, frame, y).find(({ isMain }) => isMain);
+  return g(
+    { class: 'handles of-brief' },
+    whole !== undefined &&
+      words !== undefined &&
+      typedFigure({
+        key: `width/${String(whole[0])}`,
+        name: `${whole[1].name}, width without a pier`,
+        valueM: opening.widthM,
+        leastM: 1,
+        mostM: 2000,
+        places: 1,
+        words: `${fixed(opening.widthM, 1)} m`,
+        x: words.x,
+        y: words.y - 4,
+        widthPx: textWidth(words.words, letters.drawing),
+      }),
+    ends.flatMap(({ entry, edges }) => edges.map((end) => edgeHandle(site, entry, end, frame, y, hold))),
+  );
+}
+
 /** Handles of what the brief says of the crossing: edges of obstacles, headroom over them, road levels at both ends. */
 export function briefHandles(
   site: Site,
@@ -26,29 +102,10 @@ export function briefHandles(
 ): Piece {
   const isHeld = (key: string): boolean => hold?.key === key;
   const inFrame = (at: number): boolean => at >= frame.fromM && at <= frame.toM;
-  const edges = obstacles.flatMap(({ name, fromM, toM }, index) =>
-    (['from', 'to'] as const).flatMap((end) => {
-      const at = end === 'from' ? fromM : toM;
-      if (!inFrame(at)) return [];
-      const key = `obstacle/${String(index)}/${end}`;
-      const y = frame.y(groundLevel(site, at)) + 12;
-      return handle(
-        {
-          key,
-          name: `${name}, ${end} chainage`,
-          valueM: at,
-          leastM: end === 'from' ? site.startM - 500 : fromM + 0.5,
-          mostM: end === 'from' ? toM - 0.5 : site.endM + 500,
-          places: 1,
-          words: `ch ${fixed(at, 1)}`,
-          perPx: [1 / frame.pxPerM, 0],
-          x: frame.x(at),
-          y,
-          before: isHeld(key) ? wasAt(frame.x(hold!.valueM), y, false) : null,
-        },
-        hold,
-      );
-    }),
+  const edges = [...obstacles.entries()].flatMap((entry) =>
+    (['from', 'to'] as const).map((end) =>
+      edgeHandle(site, entry, end, frame, frame.y(groundLevel(site, entry[1][`${end}M`])) + 12, hold),
+    ),
   );
   const clearances = obstacles.flatMap(({ name, clearance }, index) => {
     if (clearance === null) return [];

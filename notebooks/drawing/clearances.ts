@@ -315,10 +315,15 @@ export function barredDimension(site: Site, frame: Frame, y: number, accent: str
   );
 }
 
-/** Neighbouring hard zones run together, with one name: [from, to, words]. */
-function barredStretches(
-  site: Site,
-): { readonly fromM: number; readonly toM: number; readonly words: string }[] {
+/** A stretch barred to supports, m, and what is said of it. */
+interface Barred {
+  readonly fromM: number;
+  readonly toM: number;
+  readonly words: string;
+}
+
+/** Neighbouring hard zones run together, with one name. */
+function barredStretches(site: Site): Barred[] {
   const hard = site.zones.filter((zone) => zone.hard).sort((a, b) => a.fromM - b.fromM);
   const out: { fromM: number; toM: number; words: string }[] = [];
   for (const zone of hard) {
@@ -348,29 +353,62 @@ export const barredWash = (site: Site, frame: Frame, top: number, bottom: number
     ),
   );
 
+/** Barred stretches with the line their words stand in, counted up from the bracket: those that would touch stand in different ones. */
+function bracketLines(site: Site, pxPerM: number): (Barred & { readonly line: number })[] {
+  /** How far the words of each line reach, px from chainage nought. */
+  const reach: number[] = [];
+  return barredStretches(site).map((stretch) => {
+    const middle = ((stretch.fromM + stretch.toM) / 2) * pxPerM;
+    const half = textWidth(stretch.words, letters.drawing) / 2;
+    const free = reach.findIndex((right) => middle - half >= right + 6);
+    const line = free < 0 ? reach.length : free;
+    reach[line] = middle + half;
+    return { ...stretch, line };
+  });
+}
+
+/** From a bracket up to its words, and from one line of words to the next, px. */
+const WORDS_PX = 5;
+const LINE_PX = 12;
+
+/** Height that brackets take over their level line, to the top of their words with some air, px; 0 where nothing is barred. */
+export function bracketsPx(site: Site, pxPerM: number): number {
+  const lines = bracketLines(site, pxPerM).map(({ line }) => line + 1);
+  return lines.length === 0 ? 0 : WORDS_PX + LINE_PX * Math.max(...lines) + 2;
+}
+
+/** The words over each bracket of a level line at y: where their middle stands, and whether they are those of the main opening. */
+export const bracketWords = (
+  site: Site,
+  frame: Frame,
+  y: number,
+): (Barred & { readonly x: number; readonly y: number; readonly isMain: boolean })[] =>
+  bracketLines(site, frame.pxPerM).map((stretch) => ({
+    ...stretch,
+    x: frame.x((stretch.fromM + stretch.toM) / 2),
+    y: y - WORDS_PX - stretch.line * LINE_PX,
+    isMain: site.mainOpening?.fromM === stretch.fromM && site.mainOpening.toM === stretch.toM,
+  }));
+
 /** Accent bracket with its words on top of each barred stretch. */
-export function barredBrackets(site: Site, frame: Frame, y: number, accent: string): Piece {
-  let lastRight = -Infinity;
-  return g(
+export const barredBrackets = (site: Site, frame: Frame, y: number, accent: string): Piece =>
+  g(
     { class: 'brackets' },
-    barredStretches(site).map(({ fromM, toM, words }) => {
-      const left = frame.x(fromM);
-      const right = frame.x(toM);
-      const half = textWidth(words, 11) / 2;
-      const middle = (left + right) / 2;
-      // Words that would run into the ones before them stand a line higher.
-      const raised = middle - half < lastRight + 6;
-      lastRight = Math.max(lastRight, middle + half);
-      return g(
+    bracketWords(site, frame, y).map((stretch) =>
+      g(
         {},
         el('path', {
-          d: `M${num(left)},${num(y + 6)}V${num(y)}H${num(right)}V${num(y + 6)}`,
+          d: `M${num(frame.x(stretch.fromM))},${num(y + 6)}V${num(y)}H${num(frame.x(stretch.toM))}V${num(y + 6)}`,
           fill: 'none',
           stroke: accent,
           'stroke-width': pens.medium,
         }),
-        label(middle, y - (raised ? 17 : 5), words, { anchor: 'middle', fill: accent }),
-      );
-    }),
+        label(stretch.x, stretch.y, stretch.words, {
+          anchor: 'middle',
+          fill: accent,
+          figure:
+            stretch.isMain && stretch.words.startsWith('no pier') ? 'site/mainOpening/widthM' : undefined,
+        }),
+      ),
+    ),
   );
-}

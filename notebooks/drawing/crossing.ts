@@ -7,7 +7,14 @@ import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Asked } from './asked.ts';
 import { ofOption } from './asked.ts';
 import type { Envelope } from './clearances.ts';
-import { barredDimension, barredWash, clearances, envelopes } from './clearances.ts';
+import {
+  barredBrackets,
+  barredDimension,
+  barredWash,
+  bracketsPx,
+  clearances,
+  envelopes,
+} from './clearances.ts';
 import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
 import { datumBelow, datumBox, datumLine } from './datumLine.ts';
@@ -21,7 +28,7 @@ import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
-import { briefHandles } from './briefHandles.ts';
+import { briefHandles, openingHandles } from './briefHandles.ts';
 import {
   barredPiers,
   depthHandle,
@@ -56,7 +63,7 @@ export interface CrossingInput {
   /** Data band under the elevation; on unless said otherwise, and off at 1:2000 and smaller. */
   readonly band?: boolean;
   readonly bar?: boolean;
-  /** Piers, depth, spans and what the brief says can be taken hold of, unless the drawing is small. */
+  /** Piers, depth, spans and what the brief says can be taken hold of; of a small drawing the barred stretch alone. */
   readonly handles?: InHand;
   readonly prefix?: string;
 }
@@ -162,7 +169,9 @@ export function crossing(input: CrossingInput): Piece {
   const dimensionTop = small ? 20 : bubbleY + bubbleRadius + 20;
   const several = option !== null && option.supports.length > 2;
   const dimensionBottom = dimensionTop + (several && !small ? 22 : 0);
-  const structureY = option === null ? 24 : dimensionBottom + (small ? 10 : 18);
+  // A small drawing has no room under its deck: what is barred is said over everything.
+  const bracketsY = dimensionBottom + (small ? bracketsPx(site, pxPerMetre(scale)) : 0);
+  const structureY = option === null && bracketsY === dimensionBottom ? 24 : bracketsY + (small ? 10 : 18);
   const frame = frameOf(scale, shown, 0, { levelM: range.topM, y: structureY });
   const bottomY = frame.y(range.bottomM) + (small ? 30 : 22);
   const room: Room = {
@@ -205,7 +214,7 @@ export function crossing(input: CrossingInput): Piece {
   const over = input.window === undefined ? 14 : 0;
   const figureWidth = Math.max(...figures.map((figure) => textWidth(figure, letters.table)));
   const bodyEnd = frame.y(range.bottomM);
-  const hands = small ? undefined : input.handles;
+  const hands = input.handles;
   const narrowest = Math.min(
     ...inside.slice(1).map((at, index) => frame.x(at) - frame.x(inside[index] ?? at)),
   );
@@ -230,7 +239,8 @@ export function crossing(input: CrossingInput): Piece {
       ),
       g(
         { 'clip-path': `url(#${clip})` },
-        input.window !== undefined && barredWash(site, frame, structureY, bottomY),
+        (small || input.window !== undefined) &&
+          barredWash(site, frame, small ? bracketsY : structureY, bottomY),
         !small && strata(site, frame, range.bottomM),
         option !== null &&
           !small &&
@@ -249,7 +259,8 @@ export function crossing(input: CrossingInput): Piece {
         below,
         option !== null && !small && barredPiers(site, option, frame, ink.accent),
         option !== null &&
-          hands !== undefined && [
+          hands !== undefined &&
+          !small && [
             supportFeet(site, option, frame, bodyEnd + 6, hands.locked),
             freeBar(site, option, frame, bodyEnd + 14, hands.hold),
           ],
@@ -285,15 +296,21 @@ export function crossing(input: CrossingInput): Piece {
           },
         ),
       band?.piece,
-      hands !== undefined && [
-        input.obstacles !== undefined && briefHandles(site, input.obstacles, frame, hands.hold),
-        option !== null && [
-          pierBays(site, option, frame),
-          spanFigures(option, frame, dimensionBottom - 8),
-          depthHandle(site, option, frame, hands.hold),
-          supportHandles(site, option, frame, hands),
+      small && barredBrackets(site, frame, bracketsY, ink.accent),
+      hands !== undefined &&
+        small &&
+        input.obstacles !== undefined &&
+        openingHandles(site, input.obstacles, frame, bracketsY, hands.hold),
+      hands !== undefined &&
+        !small && [
+          input.obstacles !== undefined && briefHandles(site, input.obstacles, frame, hands.hold),
+          option !== null && [
+            pierBays(site, option, frame),
+            spanFigures(option, frame, dimensionBottom - 8),
+            depthHandle(site, option, frame, hands.hold),
+            supportHandles(site, option, frame, hands),
+          ],
         ],
-      ],
       withBar &&
         scaleBar(scale, Math.max(frame.x(site.startM), 8), afterBand + 26, {
           rightPx: width,

@@ -38,6 +38,10 @@ const presetNotes = ({ obstacles }: Brief): HtmlChild =>
 const handWords = ({ windows }: Site): string =>
   `Point at the drawing: piers, ${windows === undefined ? '' : 'abutments in their windows, '}soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier, Delete removes it, + in a span adds one.`;
 
+/** The same of a drawing at a small scale. */
+const smallHandWords =
+  'Point at the widest bracket: its ends can be dragged or stepped with the arrow keys, its width typed. Escape takes back.';
+
 /** Section 1: the brief in prose, drawing and tables, each figure changed where it stands. */
 export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
   const { brief, books, site, reference, asItStands, hands } = cells;
@@ -66,7 +70,9 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
       const has = crossingHas(scale, widthPx);
       return [
         asItStandsNote(v.asItStands, v.books.currency),
-        has.handles && room.paperPx === null && h('p', {}, handWords(v.site)),
+        room.paperPx === null &&
+          (has.handles || v.site.mainOpening !== null) &&
+          h('p', {}, has.handles ? handWords(v.site) : smallHandWords),
         has.band &&
           h(
             'p',

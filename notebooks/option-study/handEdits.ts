@@ -11,6 +11,7 @@ import {
 import { fixed } from '../format.ts';
 import { supportName } from '../drawing/alongOption.ts';
 import { putAt } from '../page/place.ts';
+import { obstacleWidth } from './brief/madeFields.ts';
 import { laidOn } from './spanChoices.ts';
 
 /** The option as the study keeps it by hand; as it stands, with the depth left open, where it is not kept yet. */
@@ -191,6 +192,7 @@ export function handEdit(key: string, option: AppraisedOption | null): HandEdit 
   const index = Number(first);
   if (kind === 'obstacle' && (second === 'from' || second === 'to'))
     return always('edge of an obstacle', (study, at) => withObstacleEdge(study, index, second, at));
+  if (kind === 'width') return always('no-pier width', obstacleWidth(index).put);
   if (kind === 'clearance') {
     const path = ['brief', 'obstacles', index, 'clearance', 'headroomM'];
     return always('headroom', (study, value) => putAt(study, path, value));

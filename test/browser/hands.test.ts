@@ -248,6 +248,34 @@ describe('by hand', () => {
     expect(await textOf(`[id="${station}"] .body`)).not.toBe(brief);
   });
 
+  it('on a narrow sheet the barred stretch is taken by its bracket: ends dragged and stepped, width typed', async () => {
+    const size = page.viewportSize()!;
+    await page.setViewportSize({ width: 400, height: 800 });
+    await page.waitForSelector(`${CROSSING} [data-handle="width/1"]`, { state: 'attached' });
+    await settled(page);
+    const [from, to] = [await valueOf('obstacle/1/from'), await valueOf('obstacle/1/to')];
+    await pull('obstacle/1/to', 6, 0);
+    await changed('obstacle/1/to', to);
+    await page.mouse.up();
+    await settled(page);
+    const wide = await valueOf('width/1');
+    expect(wide).toBeGreaterThan(to - from + 2);
+    await handle('obstacle/1/from').focus();
+    await page.keyboard.press('ArrowLeft');
+    await changed('obstacle/1/from', from);
+    await page.keyboard.press('Enter');
+    expect(await valueOf('obstacle/1/from')).toBe(from - 0.5);
+    await settled(page);
+    await handle('width/1').focus();
+    await page.keyboard.type('64');
+    await page.keyboard.press('Enter');
+    await changed('width/1', wide + 0.5);
+    expect(await valueOf('width/1')).toBe(64);
+    expect(await textOf('[id="1+010"] .body')).toContain('64.0');
+    await page.setViewportSize(size);
+    await settled(page);
+  });
+
   it('a depth is dragged and held; the study can be left to find it again', async () => {
     const before = await valueOf('depth');
     const pxM = Number(await handle('depth').getAttribute('data-down'));

@@ -114,6 +114,64 @@ describe('crossing(input)', () => {
     expect(piece.attrs['role']).toBe('group');
   });
 
+  it('at a small scale says over everything what is barred, and gives the main opening edges and a width', () => {
+    const small = (handles: boolean): Piece =>
+      crossing({
+        site,
+        option: second,
+        obstacles,
+        widthPx: 358,
+        ...(handles && { handles: { hold: null, locked: [] } }),
+      });
+    const bars = [...elements(small(false))].find(({ attrs }) => attrs['class'] === 'brackets')!;
+    const words = [...elements(bars)].filter(({ tag }) => tag === 'text');
+    expect(wordsOf(bars)).toEqual(['railway', 'no pier, 60 m']);
+    expect(words.map(({ attrs }) => attrs['data-figure'])).toEqual([undefined, 'site/mainOpening/widthM']);
+    // Between the dimensions and the structure.
+    const deck = [...elements(small(false))].find(({ attrs }) => attrs['class'] === 'elevation')!;
+    const tops = [...elements(deck)].flatMap(({ attrs }) =>
+      [...(attrs['d'] ?? '').matchAll(/[ML][\d.]+,([\d.]+)/gu)].map(([, y]) => Number(y)),
+    );
+    for (const { attrs } of words) expect(Number(attrs['y'])).toBeLessThan(Math.min(...tops));
+    const [dimension] = [...elements(small(false))].filter(
+      ({ tag, attrs }) => tag === 'text' && attrs['y'] === '16',
+    );
+    expect(dimension).toBeDefined();
+    for (const { attrs } of words) expect(Number(attrs['y'])).toBeGreaterThan(16 + 11);
+
+    const held = [...elements(small(true))].filter(({ attrs }) => attrs['data-handle'] !== undefined);
+    expect(
+      held.map(({ attrs }) => [
+        attrs['data-handle'],
+        attrs['role'],
+        attrs['aria-valuenow'],
+        attrs['tabindex'],
+      ]),
+    ).toEqual([
+      ['width/1', 'spinbutton', '60', '0'],
+      ['obstacle/1/from', 'slider', '1325', '0'],
+      ['obstacle/1/to', 'slider', '1385', '0'],
+    ]);
+    expect([...elements(small(false))].some(({ attrs }) => attrs['data-handle'] !== undefined)).toBe(false);
+  });
+
+  it('puts words of neighbouring brackets that would touch in lines of their own', () => {
+    const zone = site.zones.find(({ hard }) => hard)!;
+    const zones = [0, 12, 24].map((at) => ({
+      ...zone,
+      kind: 'railway' as const,
+      fromM: 1300 + at,
+      toM: 1306 + at,
+    }));
+    const close = { ...site, zones, mainOpening: { fromM: 1300, toM: 1306, widthM: 6 } };
+    const piece = crossing({ site: close, option: second, obstacles, widthPx: 358 });
+    const bars = [...elements(piece)].find(({ attrs }) => attrs['class'] === 'brackets')!;
+    const lines = [...elements(bars)]
+      .filter(({ tag }) => tag === 'text')
+      .map(({ attrs }) => Number(attrs['y']));
+    expect(new Set(lines).size).toBe(3);
+  });
+
   it('draws a site without zones, water, limits or ground classes', () => {
     const bare = { ...site, zones: [], waters: [], soffitLimits: [], groundStretches: [], mainOpening: null };
     const words = wordsOf(crossing({ site: bare, option: null, widthPx: 980 }));

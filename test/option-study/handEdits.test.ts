@@ -225,6 +225,9 @@ describe('handEdit(key, option)', () => {
     const index = numbered.brief.obstacles.findIndex(({ clearance }) => clearance !== null);
     expect(put(`clearance/${index}`, 6.2).brief.obstacles[index]!.clearance!.headroomM).toBe(6.2);
     expect(put(`obstacle/${index}/to`, 1290).brief.obstacles[index]!.toM).toBe(1290);
+    const { fromM, toM } = numbered.brief.obstacles[index]!;
+    const wide = put(`width/${index}`, toM - fromM + 4).brief.obstacles[index]!;
+    expect([wide.fromM, wide.toM]).toEqual([fromM - 2, toM + 2]);
     expect(handEdit('somewhere/1', option)).toBeNull();
     expect(handEdit('pier/1', null)).toBeNull();
   });
