@@ -57,6 +57,12 @@ export function signed(value: number, places: number): string {
   return Number(Math.abs(value).toFixed(places)) === 0 || value < 0 ? text : `+${text}`;
 }
 
+const POWERS = { 2: '²', 3: '³', 4: '⁴' } as const;
+
+/** Powers of lengths, and those written with a caret, as they are printed: '0.35 m2 at 3 m3/s, c^2' -> '0.35 m² at 3 m³/s, c²'. */
+export const powers = (text: string): string =>
+  text.replace(/(?:\^|(?<=\b[cm]?m))([234])(?!\d)/gu, (_, power: '2' | '3' | '4') => POWERS[power]);
+
 /** Sign of a currency where it has a usual one, else its letters. */
 export function currencySign(currency: string): string {
   const signs: Readonly<Record<string, string>> = { EUR: '€', GBP: '£', USD: '$' };

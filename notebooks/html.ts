@@ -5,10 +5,21 @@ type Listener = (event: Event) => void;
 export type HtmlChild = Node | Piece | string | number | null | undefined | false | readonly HtmlChild[];
 export type HtmlAttrs = Readonly<Record<string, string | number | boolean | null | undefined | Listener>>;
 
+/** A word that begins with the letter of its shape, as in 'I-girders', is not parted at its hyphen. */
+const SHAPED = /(\bI-\p{Ll}+)/u;
+
+/** Puts text down; in a list of choices nothing but text may stand. */
+function write(parent: Element, text: string): void {
+  if (parent.localName === 'option' || !SHAPED.test(text)) return parent.append(text);
+  for (const [i, part] of text.split(SHAPED).entries())
+    if (i % 2 === 1) parent.append(h('span', { class: 'glue' }, document.createTextNode(part)));
+    else if (part !== '') parent.append(part);
+}
+
 function append(parent: Element, child: HtmlChild): void {
   if (child === null || child === undefined || child === false) return;
   if (Array.isArray(child)) for (const one of child as readonly HtmlChild[]) append(parent, one);
-  else if (typeof child === 'string') parent.append(child);
+  else if (typeof child === 'string') write(parent, child);
   else if (typeof child === 'number') parent.append(String(child));
   else if (child instanceof Node) parent.append(child);
   else parent.append(toDom(child as Piece, document));

@@ -2,6 +2,7 @@ import { fixed } from '../format.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
+import { textWidth } from '../drawing/lettering.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
@@ -35,6 +36,9 @@ function shown({ buckets, asked, widthPx }: ShareColumnsInput): readonly BuiltBu
   return buckets.slice(from, from + 3);
 }
 
+/** Where names begin on a narrow sheet, right of their glyph, px. */
+const NARROW_NAME_PX = 38;
+
 /** Share of each recorded form among bridges of like span, one column per bucket of span. */
 export function shareColumns(input: ShareColumnsInput): Piece {
   const { classes, asked, widthPx } = input;
@@ -45,7 +49,9 @@ export function shareColumns(input: ShareColumnsInput): Piece {
     classes.flatMap(({ form }) => form ?? []),
     input.prefix ?? 'shares',
   );
-  const left = narrow ? 158 : 210;
+  // The columns stand clear of the longest name.
+  const names = Math.max(...classes.map(({ words }) => textWidth(words, letters.drawing)));
+  const left = narrow ? NARROW_NAME_PX + Math.ceil(names) + 8 : 210;
   const columnPx = (widthPx - left) / buckets.length;
   const barPx = columnPx - 28;
   const head = 40;
@@ -80,7 +86,7 @@ export function shareColumns(input: ShareColumnsInput): Piece {
         { class: 'form' },
         levelLine(0, widthPx, y - rowPx / 2),
         form !== null && glyph(form, 0, y - 8, ink.line(form)),
-        label(narrow ? 38 : 42, y + 4, words, narrow ? {} : { size: letters.table }),
+        label(narrow ? NARROW_NAME_PX : 42, y + 4, words, narrow ? {} : { size: letters.table }),
         buckets.map((bucket, index) => {
           const percent = bucket.percent[id];
           if (percent === undefined) return null;

@@ -1,4 +1,5 @@
 import type { Figure, FigureKind } from '../../lib/index.ts';
+import { powers } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
 import type { ChainRow } from './figureChain.ts';
 import { printedValue, valueWords } from './figureValue.ts';
@@ -44,16 +45,12 @@ const reading = (sources: readonly Source[]): HTMLElement =>
     : h('i', {}, sources.every(isRuleOfThumb) ? 'common practice' : 'from memory');
 
 /** A source without its stop, and without what is said of its reading beside it. */
-const named = ({ text }: Source): string => text.replace(/(?: \(from memory\)|, from memory)?\.?$/u, '');
-
-const POWERS = { 2: '²', 3: '³', 4: '⁴' } as const;
+const named = ({ text }: Source): string =>
+  powers(text).replace(/(?: \(from memory\)|, from memory)?\.?$/u, '');
 
 /** Trade notation with its own signs: 'a x b - c^2, 0.35 m2' -> 'a × b − c², 0.35 m²'. */
 const notation = (formula: string): string =>
-  formula
-    .replaceAll(' x ', ' × ')
-    .replaceAll(' - ', ' − ')
-    .replace(/(?:\^|(?<=\b[cm]?m))([234])(?!\d)/gu, (_, power: '2' | '3' | '4') => POWERS[power]);
+  powers(formula.replaceAll(' x ', ' × ').replaceAll(' - ', ' − '));
 
 /** How a figure was found, in a word or two, and whether its source was read. */
 function shortly(figure: Figure): HtmlChild {
@@ -87,7 +84,7 @@ function cellsOf(row: ChainRow): readonly [first: HtmlChild, second: HtmlChild] 
     [
       h('span', { class: looks[figure.kind] }, text),
       unit === '' ? ' ' : ` ${unit} `,
-      h('span', { class: 'name' }, figure.label),
+      h('span', { class: 'name' }, powers(figure.label)),
     ],
     row.isOpen ? fully(figure) : shortly(figure),
   ];

@@ -1,5 +1,5 @@
 import type { Figure } from '../../lib/index.ts';
-import { currencySign, fixed, money2, moneyUnit, odds, significant, use } from '../format.ts';
+import { currencySign, fixed, money2, moneyUnit, odds, powers, significant, use } from '../format.ts';
 import { heldWords } from './heldWords.ts';
 
 type Valued = Pick<Figure, 'path' | 'value' | 'unit'>;
@@ -7,10 +7,7 @@ type Valued = Pick<Figure, 'path' | 'value' | 'unit'>;
 /** A unit as it is printed: 'kg/m2' -> 'kg/m²', 'EUR/kg' -> '€/kg', 'deg' -> '°'; a count has none. */
 function unitWords(unit: string): string {
   if (unit === 'no') return '';
-  return unit
-    .replace(/\b[A-Z]{3}\b/u, (currency) => currencySign(currency))
-    .replace(/(?<=m)[234]/gu, (power) => ({ 2: '²', 3: '³' })[Number(power)] ?? '⁴')
-    .replace(/^deg$/u, '°');
+  return powers(unit.replace(/\b[A-Z]{3}\b/u, (currency) => currencySign(currency)).replace(/^deg$/u, '°'));
 }
 
 /** Metres: chainages to the decimetre, lengths and levels to the centimetre, plates to the millimetre. */

@@ -1,4 +1,5 @@
 import { pathsOf } from '../drawing/asked.ts';
+import { powers } from '../format.ts';
 import { h } from '../html.ts';
 import type { ChainView } from './chainView.ts';
 import { chainView } from './chainView.ts';
@@ -83,7 +84,8 @@ export function whereFrom(sheet: HTMLElement, stationOf: (path: string) => strin
     try {
       const names = paths.slice(0, 2).map((path) => {
         const found = ask!(path);
-        return words === '' ? `${found.label} ${valueWords(found)}` : found.label;
+        const name = powers(found.label);
+        return words === '' ? `${name} ${valueWords(found)}` : name;
       });
       return [
         ...(words === '' ? [] : [`${words}:`]),

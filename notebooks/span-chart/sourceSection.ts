@@ -1,3 +1,4 @@
+import { powers } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet } from '../page/index.ts';
 import { knownWords, references } from './references.ts';
@@ -20,7 +21,7 @@ export function sourceSection(page: Sheet): LineSection {
           h(
             'li',
             { class: knownWords(work) === 'read' ? 'read' : 'remembered' },
-            work.text,
+            powers(work.text),
             ' ',
             h(
               'span',

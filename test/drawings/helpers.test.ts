@@ -22,6 +22,7 @@ import {
   moneyUnit,
   odds,
   signed,
+  powers,
   significant,
   spansText,
   plain,
@@ -124,6 +125,15 @@ describe('figures as printed', () => {
       '0',
     ]);
   });
+  it('powers(text) sets the powers of lengths and what stands after a caret, and nothing else', () => {
+    expect(powers('flow 1,684.5 m3/s, A 675.6 m2, 350 kg/m2, I 0.4 m4, 80 mm2')).toBe(
+      'flow 1,684.5 m³/s, A 675.6 m², 350 kg/m², I 0.4 m⁴, 80 mm²',
+    );
+    expect(powers('(q^2 / f)^(1/3), 12 m 3 wide, m20, LM2, form2')).toBe(
+      '(q² / f)^(1/3), 12 m 3 wide, m20, LM2, form2',
+    );
+  });
+
   it('significant(value, 3) rounds a value that gains a digit', () => {
     expect(significant(9.996, 3)).toBe('10.0');
     expect(significant(-0.04567, 2)).toBe('\u22120.046');
