@@ -1,5 +1,6 @@
 import { level } from '../format.ts';
 import { formInk } from '../forms/formInk.ts';
+import { formLooks } from '../forms/formLook.ts';
 import { optionNumber } from '../forms/optionNumber.ts';
 import type { AppraisedOption, Design } from '../model.ts';
 import { ofOption } from './asked.ts';
@@ -86,7 +87,7 @@ export function sectionRow(input: SectionRowInput): Piece {
   const perLine = Math.ceil(drawn.length / Math.ceil(drawn.length / most)) || 1;
   const column = widthPx / perLine;
   const linesOf = ({ option, design }: Drawn): string[] =>
-    (input.words?.[option.number] ?? depthLines(design)).flatMap((text) =>
+    (input.words?.[option.number] ?? [formLooks[option.form].short, ...depthLines(design)]).flatMap((text) =>
       wrapText(text, column - 34, letters.table),
     );
   let y = 0;

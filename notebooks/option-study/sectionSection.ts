@@ -2,6 +2,8 @@ import { checkBars, checkTable } from '../charts/checkBars.ts';
 import { tableBehind } from '../charts/table.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { section } from '../drawing/section.ts';
+import type { Piece } from '../drawing/piece.ts';
+import type { Scale } from '../drawing/scale.ts';
 import { mainDesign, mainDesignPath, sectionRow } from '../drawing/sectionRow.ts';
 import { use } from '../format.ts';
 import { h } from '../html.ts';
@@ -81,13 +83,19 @@ export function sectionSection(page: Sheet, cells: StudyCells): LineSection {
       title: 'Sections side by side',
       shows: { appraisal, reference },
       wide: true,
-      body: (v, room) =>
-        sectionRow({
-          options: firstOfEachForm(v.appraisal.options),
-          reference: v.reference?.number ?? null,
-          widthPx: room.widthPx,
-          prefix: 'sections',
-        }),
+      body: (v, room) => {
+        const at = (scale: Scale): Piece =>
+          sectionRow({
+            options: firstOfEachForm(v.appraisal.options),
+            reference: v.reference?.number ?? null,
+            widthPx: room.widthPx,
+            scale,
+            prefix: 'sections',
+          });
+        const whole = at(250);
+        // What is taller than a sheet of paper stands on it at the next scale.
+        return room.paperPx !== null && Number(whole.attrs['height']) > room.paperPx ? at(500) : whole;
+      },
       notes: [h('p', {}, 'The cheapest option of each form, on one road level and one scale.')],
     }),
   ]);
