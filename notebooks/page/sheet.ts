@@ -10,6 +10,7 @@ import { lateness } from './lateness.ts';
 import { isDragging } from './dragging.ts';
 import { drawingActions } from './drawingFile.ts';
 import { isUpright, runningFoot } from './paper.ts';
+import { bringTabbedToSight } from './tabbedTo.ts';
 import { rests as newRests } from './rests.ts';
 import { sight as newSight } from './sight.ts';
 import { saveTables } from './tableFile.ts';
@@ -314,7 +315,7 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
       const stopFoot = runningFoot(() => [heading(), ...foot()]);
       window.addEventListener('beforeprint', onPaper);
       window.addEventListener('afterprint', onScreen);
-      stops.push(lines.end, stopFoot, () => {
+      stops.push(lines.end, stopFoot, bringTabbedToSight(), () => {
         window.removeEventListener('beforeprint', onPaper);
         window.removeEventListener('afterprint', onScreen);
       });

@@ -48,4 +48,38 @@ describe('the option study', () => {
     await page.locator('.choices [role="spinbutton"]').first().scrollIntoViewIfNeeded();
     expect(await faultsOf(page)).toEqual([]);
   });
+
+  it('what the Tab key comes to in a table pushed sideways is wholly on the screen, in a frame that is not cut', async () => {
+    const { page } = study;
+    await page.setViewportSize({ width: 400, height: 900 });
+    await settled(page);
+    await page.locator('.obstacles .fig').first().focus();
+    for (let i = 0; i < 9; i += 1) {
+      await page.keyboard.press('Tab');
+      const found = await page.evaluate(() => {
+        const [field, table] = [document.activeElement!, document.activeElement!.closest('.across')!];
+        const [inner, outer] = [field.getBoundingClientRect(), table.getBoundingClientRect()];
+        const { outlineStyle, outlineWidth } = getComputedStyle(field);
+        return {
+          name: field.getAttribute('aria-label'),
+          left: inner.left - outer.left,
+          right: outer.right - inner.right,
+          frame: `${outlineStyle} ${outlineWidth}`,
+        };
+      });
+      expect(found.name).toMatch(/obstacle 1/u);
+      expect(found.frame).toBe('solid 2px');
+      expect(Math.min(found.left, found.right), found.name!).toBeGreaterThanOrEqual(4);
+    }
+  });
+
+  it('what is touched in a sentence is at least 24 px high on a hand-held screen', async () => {
+    const { page } = study;
+    const low = await page
+      .locator('[id="1+010"] .fig, h1 ~ * .worked')
+      .evaluateAll((all) =>
+        all.filter((one) => one.getBoundingClientRect().height < 23.9).map((one) => one.outerHTML),
+      );
+    expect(low).toEqual([]);
+  });
 });
