@@ -35,12 +35,7 @@ export function sizingSaid(
 /** The same as lists; one sentence where there is nothing to say. */
 export function sizingWords(option: AppraisedOption, isDepthAsked: boolean): HtmlChild {
   const said = sizingSaid(option, isDepthAsked);
-  if (said.length === 0)
-    return h(
-      'p',
-      { class: 'prose' },
-      'Nothing beside its checks: nothing was assumed, nothing has to be provided.',
-    );
+  if (said.length === 0) return h('p', { class: 'prose' }, 'Sizing has nothing to add to the checks.');
   return said.map(({ unit, words }) => [
     unit !== '' && h('p', { class: 'prose' }, unit),
     h(
