@@ -2,7 +2,7 @@ import { fixed, level } from '../format.ts';
 import type { Obstacle, Site } from '../model.ts';
 import { groundLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
-import { bracketWords } from './clearances.ts';
+import { bracketWords } from './barred.ts';
 import { handle, typedFigure } from './handle.ts';
 import type { Hold } from './hold.ts';
 import { colours, letters, pens } from './ink.ts';

@@ -6,15 +6,9 @@ import { PARAPET_M, roadLevel, soffitLevel, spanPaths, supportChainages } from '
 import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Asked } from './asked.ts';
 import { ofOption } from './asked.ts';
+import { barredBrackets, barredDimension, barredWash, bracketsPx } from './barred.ts';
 import type { Envelope } from './clearances.ts';
-import {
-  barredBrackets,
-  barredDimension,
-  barredWash,
-  bracketsPx,
-  clearances,
-  envelopes,
-} from './clearances.ts';
+import { clearances, envelopes } from './clearances.ts';
 import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
 import { dataBand } from './dataBand.ts';
 import { datumBelow, datumBox, datumLine } from './datumLine.ts';

@@ -3,7 +3,7 @@ import { glyph } from '../forms/glyph.ts';
 import type { AppraisedOption } from '../model.ts';
 import { spanPaths, spansOf, supportChainages } from './alongOption.ts';
 import { ofOption, perM2Of, rangeOf, withinOf } from './asked.ts';
-import { barredWash } from './clearances.ts';
+import { barredWash } from './barred.ts';
 import { elevationBody, levelRange } from './elevation.ts';
 import { frameOf } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';

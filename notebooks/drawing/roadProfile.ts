@@ -3,7 +3,7 @@ import { formInk } from '../forms/formInk.ts';
 import type { AppraisedOption, Site } from '../model.ts';
 import { roadBends, roadLevel, supportChainages, supportName } from './alongOption.ts';
 import { overOf } from './asked.ts';
-import { barredWash } from './clearances.ts';
+import { barredWash } from './barred.ts';
 import { datumBelow, datumBox, datumLine } from './datumLine.ts';
 import { optionWords } from './elevation.ts';
 import { frameOf, type Frame } from './frame.ts';

@@ -3,7 +3,7 @@ import { glyph } from '../forms/glyph.ts';
 import type { AppraisedOption } from '../model.ts';
 import { spanPaths, spansOf, supportChainages } from './alongOption.ts';
 import { ofOption, perM2Of, rangeOf, withinOf, type Asked } from './asked.ts';
-import { barredBrackets, barredWash } from './clearances.ts';
+import { barredBrackets, barredWash } from './barred.ts';
 import { dimensionChain } from './dimension.ts';
 import { elevationBody, levelRange } from './elevation.ts';
 import { frameOf, type Frame } from './frame.ts';
