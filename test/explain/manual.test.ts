@@ -46,7 +46,7 @@ function numbersIn(value: unknown, path: string, by?: string): string[] {
 }
 
 /** What rounding leaves of two equal levels, 1e-12 m either way, is nought. */
-const NOUGHT = 1e-9;
+const NOUGHT = 1e-11;
 
 function relative(a: number, b: number): number {
   const most = Math.max(Math.abs(a), Math.abs(b));

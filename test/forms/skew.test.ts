@@ -51,7 +51,7 @@ describe.each(units)('size(%s) of a skew deck', (form, spansM, depthM) => {
       sized(form, spansM, depthM, { skewDeg }).reactions.map(({ trafficMaxKN }) => trafficMaxKN);
     const square = traffic(0);
     // Plates and beams change with shear, and with them a little how stiff the deck is along its length.
-    traffic(45).forEach((kN, j) => expect(kN / square[j]!).toBeCloseTo(1, 1));
+    traffic(45).forEach((kN, j) => expect(kN / square[j]!).toBeCloseTo(1, 2));
   });
 });
 

@@ -97,6 +97,18 @@ describe('concreteBox', () => {
     );
   });
 
+  it('turns a shorter radius into more stirrups, in webs no thinner', () => {
+    // A straight deck is left out: its webs are one step of their mould thinner, which asks for more stirrups.
+    const curves = [600, 300, 150, 100].map((planRadiusM) => concreteBox.size({ ...usual, planRadiusM }));
+    const stirrups = curves.map(({ lines }) => lines.find(({ what }) => what === 'stirrups')!.quantity);
+    for (let i = 1; i < curves.length; i++) {
+      expect(stirrups[i]).toBeGreaterThan(stirrups[i - 1]!);
+      expect(curves[i]!.figures['webAtSupportsM']).toBeGreaterThanOrEqual(
+        curves[i - 1]!.figures['webAtSupportsM']!,
+      );
+    }
+  });
+
   it('does not give short spans the strands of one long span', () => {
     const strand = (spansM: number[]): number => concreteBox.size(boxTask(spansM, 2.6)).figures.strandKgM2!;
     const uneven = strand([40, 42, 63, 42, 40]);

@@ -104,6 +104,7 @@ describe('cantileverBox.size(wide deck on ribs)', () => {
     expect(permanentKN(ribbed) / (25 * quantityOf(ribbed.lines, 'box-concrete') + laid)).toBeCloseTo(1, 2);
     const manual = new Set(cantileverFigures.map(({ path }) => path));
     const added = Object.keys(ribbed.figures).filter((name) => !(name in plain.figures));
+    expect(added.length).toBeGreaterThan(3);
     for (const name of ['ribDepthM', 'ribRootKNm', 'ribInsideKNm', 'ribShearKN'])
       expect(added).toContain(name);
     for (const name of added)
