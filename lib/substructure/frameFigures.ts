@@ -4,7 +4,9 @@ import { pushedBy, turnedBy } from './framedShaft.ts';
 import { holding, isShared, stiffnesses, stillPath } from './heldPaths.ts';
 import { heldIn, unitsAt, type UnitAt } from './meetings.ts';
 import { crackedEI } from './pierStiffness.ts';
+import { shaftDuties } from './shaftDuties.ts';
 import { shaftInertia } from './sizeShaft.ts';
+import { soffitFormula, soffitInputs, soffitOver } from './soffitOver.ts';
 import { supportName } from './supportFigures.ts';
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
@@ -121,15 +123,9 @@ export const frameFigures: readonly Descriptor[] = [
     label: on('top of the support'),
     unit: 'm',
     method: 'difference',
-    formula: `road level - structural depth - surfacing - crossfall x width between kerbs / 2: the soffit, with no bearings under it`,
-    inputs: (at) => ({
-      road: `${at.foot}/roadM`,
-      depth: `${at.foot}/deckDepthM`,
-      surfacing: 'site/deck/surfacingM',
-      crossfall: 'practice/site/crossfall',
-      kerbs: 'site/deck/carriagewayM',
-    }),
-    compute: (v) => v.road - v.depth - v.surfacing - (v.crossfall * v.kerbs) / 2,
+    formula: `${soffitFormula}: the soffit, with no bearings under it`,
+    inputs: soffitInputs,
+    compute: soffitOver,
   }),
   described({
     path: support('shaft/lengthM'),
@@ -140,20 +136,9 @@ export const frameFigures: readonly Descriptor[] = [
     formula:
       'axial stress, slenderness as it stands free until the deck is joined, and bending at foot and top with what the deck moves and turns, in steps; a thicker shaft draws more of that, so where none passes the one that is least beyond what it carries',
     inputs: (at) => ({
-      height: `${at.foot}/heightM`,
-      permanent: `${at.foot}/permanentKN`,
-      design: `${at.foot}/articulation/bearingMN`,
-      along: `${at.foot}/articulation/alongKN`,
-      across: `${at.foot}/articulation/acrossKN`,
+      ...shaftDuties(at),
       push: `${at.foot}/articulation/frame/pushMm`,
       turned: ['deckTurnKNm', 'laidKNm', 'trafficKNm'].map((field) => castInPath(at, field)),
-      building:
-        at.support.articulation.buildingKNm === undefined ? [] : [`${at.foot}/articulation/buildingKNm`],
-      struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],
-      earthquake: at.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
-      stress: pier('axialShare'),
-      slenderness: pier('slenderness'),
-      step: pier('stepM'),
     }),
   }),
   described({

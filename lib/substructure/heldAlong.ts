@@ -12,7 +12,10 @@ import { seismicLoad } from './seismicLoad.ts';
 
 /** How a unit is held along the road. */
 export interface HeldAlong {
-  /** Stiffness of each of its supports against the deck moving along the road, kN per m; 0 where it slides. One that holds it alone has 1. */
+  /**
+   * Stiffness of each of its supports against the deck moving along the road, kN per m; 0 where it slides. One that
+   * holds it alone has 1.
+   */
   readonly stiffnessKNm: readonly number[];
   /** Chainage that stays where it is when the deck grows or shrinks, m. */
   readonly stillM: number;
@@ -50,8 +53,8 @@ export function forceAlong({ site, unit, design }: UnitOnGround, { stiffnessKNm 
 }
 
 /**
- * Force along the road on a support that holds a unit, kN: its share of braking and friction by stiffness, and what it takes
- * to bend or shear it by half the movement, both ways together, of its distance from the point that stays.
+ * Force along the road on a support that holds a unit, kN: its share of braking and friction by stiffness, and what it
+ * takes to bend or shear it by half the movement, both ways together, of its distance from the point that stays.
  */
 export const holdingForce = (
   forceKN: number,
@@ -64,7 +67,10 @@ export const holdingForce = (
 export const stillAt = (x: readonly number[], stiffness: readonly number[]): number =>
   x.reduce((moment, at, i) => moment + at * stiffness[i]!, 0) / sum(stiffness);
 
-/** Shear stiffness of the laminated rubber of one unit on one support, kN/m: G A / height for its load, kN, and movement, mm. */
+/**
+ * Shear stiffness of the laminated rubber of one unit on one support, kN/m: G A / height for its load, kN, and
+ * movement, mm.
+ */
 export function rubberStiffness(loadKN: number, movementMm: number): number {
   const { rubberShearMPa, rubberPressureMPa, leastRubberM } = substructureData.bearings;
   const areaM2 = loadKN / (rubberPressureMPa * 1000);
@@ -140,12 +146,12 @@ function byFrame(on: UnitOnGround, castIn: readonly CastInPier[]): HeldAlong {
 }
 
 /**
- * How a unit is held along the road. Piers that the deck is cast in with hold it. Elsewhere one support near its middle holds it alone, unless two or more neighbouring piers with
- * that one among them, or laminated rubber on all its supports, leave smaller moments at the feet of its piers, the worst of
- * them counted twice: braking and friction are then shared by stiffness, 3 E I / h^3 of a pier with the rubber on it in
- * series, and each pier is bent by what the deck moves over it. Foundations are taken as rigid: on the safe side for what
- * bends a pier. Units on pylons or with walls of their own, and decks cast into their abutments
- * (`alone`), have one fixed point.
+ * How a unit is held along the road. Piers that the deck is cast in with hold it. Elsewhere one support near its middle
+ * holds it alone, unless two or more neighbouring piers with that one among them, or laminated rubber on all its
+ * supports, leave smaller moments at the feet of its piers, the worst of them counted twice: braking and friction are
+ * then shared by stiffness, 3 E I / h^3 of a pier with the rubber on it in series, and each pier is bent by what the
+ * deck moves over it. Foundations are taken as rigid: on the safe side for what bends a pier. Units on pylons or with
+ * walls of their own, and decks cast into their abutments (`alone`), have one fixed point.
  */
 export function heldAlong(on: UnitOnGround, alone = false): HeldAlong {
   const { site, unit, design, heightM, waterDepthM } = on;

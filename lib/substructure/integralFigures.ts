@@ -1,6 +1,7 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { foundationAt } from './foundationFigures.ts';
 import { unitsAt } from './meetings.ts';
+import { soffitFormula, soffitInputs, soffitOver } from './soffitOver.ts';
 import { supportName } from './supportFigures.ts';
 
 const support = (steps: string): string => `options/:option/supports/:support/${steps}`;
@@ -53,15 +54,9 @@ export const integralFigures: readonly Descriptor[] = [
     label: on('soffit at the wall'),
     unit: 'm',
     method: 'difference',
-    formula: 'road level - structural depth - surfacing - crossfall x width between kerbs / 2',
-    inputs: (at) => ({
-      road: `${at.foot}/roadM`,
-      depth: `${at.foot}/deckDepthM`,
-      surfacing: 'site/deck/surfacingM',
-      crossfall: 'practice/site/crossfall',
-      kerbs: 'site/deck/carriagewayM',
-    }),
-    compute: (v) => v.road - v.depth - v.surfacing - (v.crossfall * v.kerbs) / 2,
+    formula: soffitFormula,
+    inputs: soffitInputs,
+    compute: soffitOver,
   }),
   described({
     path: support('footM'),

@@ -35,9 +35,9 @@ export const crackedEI = (inertiaM4: number): number =>
   substructureData.concrete.modulusMPa * 1000 * substructureData.concrete.crackedShare * inertiaM4;
 
 /**
- * Stiffness of a pier against its top moving along the road, kN per m: 3 E I / h^3 of a cantilever from a rigid foundation,
- * height in metres, under a deck so wide along its supports, m. Its shaft is as thick as its slenderness alone asks for; cracks and creep leave it a share of its
- * stiffness.
+ * Stiffness of a pier against its top moving along the road, kN per m: 3 E I / h^3 of a cantilever from a rigid
+ * foundation, height in metres, under a deck so wide along its supports, m. Its shaft is as thick as its slenderness
+ * alone asks for; cracks and creep leave it a share of its stiffness.
  */
 export function pierStiffness(alongSupportsM: number, heightM: number, isLeaf: boolean): number {
   return (3 * crackedEI(slenderShaft(alongSupportsM, heightM, isLeaf).inertiaM4)) / heightM ** 3;

@@ -1,4 +1,5 @@
 import { described, type AbutmentWall, type At, type Descriptor } from '../model/index.ts';
+import { shaftDuties } from './shaftDuties.ts';
 import { supportName } from './supportFigures.ts';
 
 const support = (steps: string): string => `options/:option/supports/:support/${steps}`;
@@ -27,23 +28,6 @@ const linesOf = (at: At, item: string): string[] =>
   at.support.lines.flatMap((line, i) => (line.item === item ? [`${at.foot}/lines/${i}/quantity`] : []));
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
-
-/** What a pier shaft is sized for. */
-const pierInputs = (at: At) =>
-  ({
-    height: `${at.foot}/heightM`,
-    permanent: `${at.foot}/permanentKN`,
-    design: `${at.foot}/articulation/bearingMN`,
-    along: `${at.foot}/articulation/alongKN`,
-    across: `${at.foot}/articulation/acrossKN`,
-    building:
-      at.support.articulation.buildingKNm === undefined ? [] : [`${at.foot}/articulation/buildingKNm`],
-    struck: at.support.articulation.vesselKN === undefined ? [] : [`${at.foot}/articulation/vesselKN`],
-    earthquake: at.site.seismic == null ? [] : ['site/seismic/groundAccelerationG'],
-    stress: pier('axialShare'),
-    slenderness: pier('slenderness'),
-    step: pier('stepM'),
-  }) as const;
 
 /** Levels and walls of an abutment that its own figures need, under one name each. */
 const abutmentInputs = (at: At) =>
@@ -156,7 +140,7 @@ export const shaftFigures: readonly Descriptor[] = [
     unit: 'm',
     method: 'thinnest that passes',
     formula: 'axial stress, slenderness and bending at the foot, in steps; bars by published ratio',
-    inputs: pierInputs,
+    inputs: shaftDuties,
   }),
   described({
     path: support('shaft/widthM'),

@@ -2,6 +2,7 @@ import { described, type At, type Descriptor } from '../model/index.ts';
 import { levelOnRoad, onRoad, onRoadFormula } from '../site/onRoad.ts';
 import { depthOver } from './depthOver.ts';
 import { depthPathAt, unitsAt } from './meetings.ts';
+import { soffitFormula, soffitInputs, soffitOver } from './soffitOver.ts';
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 
@@ -111,17 +112,9 @@ export const supportFigures: readonly Descriptor[] = [
     label: on('top of the support'),
     unit: 'm',
     method: 'difference',
-    formula:
-      'road level - structural depth - surfacing - crossfall x width between kerbs / 2 - height of the bearing',
-    inputs: (at) => ({
-      road: `${at.foot}/roadM`,
-      depth: `${at.foot}/deckDepthM`,
-      surfacing: 'site/deck/surfacingM',
-      crossfall: 'practice/site/crossfall',
-      kerbs: 'site/deck/carriagewayM',
-      bearing: 'data/substructure/bearings/heightM',
-    }),
-    compute: (v) => v.road - v.depth - v.surfacing - (v.crossfall * v.kerbs) / 2 - v.bearing,
+    formula: `${soffitFormula} - height of the bearing`,
+    inputs: (at) => ({ ...soffitInputs(at), bearing: 'data/substructure/bearings/heightM' }),
+    compute: (v) => soffitOver(v) - v.bearing,
   }),
   described({
     path: support('heightM'),
