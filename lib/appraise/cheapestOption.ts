@@ -1,4 +1,4 @@
-import { formModule } from '../forms/index.ts';
+import { carries, formModule } from '../forms/index.ts';
 import {
   asMade,
   isOpen,
@@ -10,7 +10,8 @@ import {
   type Variant,
 } from '../model/index.ts';
 import { depthRange } from './depthRange.ts';
-import { leastCostDepth, type DepthTrial } from './leastCostDepth.ts';
+import { depthThatCarries } from './depthThatCarries.ts';
+import type { DepthTrial } from './leastCostDepth.ts';
 import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
 import { spansOf } from './askedTask.ts';
@@ -30,7 +31,7 @@ interface Made {
   readonly trial: DepthTrial;
 }
 
-const fits = ({ utilisation }: DepthTrial): boolean => utilisation <= 1;
+const fits = ({ utilisation }: DepthTrial): boolean => carries(utilisation);
 
 /** Cost of a trial that is too weak counts as many times as it is overloaded: what it lacks has its price. */
 const worth = ({ cost, utilisation }: DepthTrial): number => cost * Math.max(1, utilisation);
@@ -55,11 +56,11 @@ function depthsToTry(
   return [least, Math.max(least, Math.min(most, OVER_DECK_ALONE * deckAlone))];
 }
 
-/** The shallowest depth within 1 % of the least cost of the whole crossing at mean rates. */
+/** The shallowest depth within 1 % of the least cost of the whole crossing at mean rates; deeper where nothing carries. */
 function* atBestDepth(bench: Workbench, option: MadeOption, nearM: number): Work<Made> {
   const main = mainUnit(option.units);
   const tryAt = (depthM: number): DepthTrial => trialAt(bench, option, depthM);
-  const depthM = yield* leastCostDepth(depthsToTry(bench, option, main), tryAt, nearM);
+  const { depthM } = yield* depthThatCarries(depthsToTry(bench, option, main), tryAt, nearM);
   return { option, depthM, trial: tryAt(depthM) };
 }
 

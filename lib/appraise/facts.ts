@@ -1,4 +1,5 @@
 import type { AppraisedOption, Facts, Option, Site, Study, Unit, WorkedOption } from '../model/index.ts';
+import { cannotCarry } from '../forms/index.ts';
 import { roadLevelAt, constructionDepth, groundAt, waterDepthAt } from '../site/index.ts';
 import { quantitiesOf } from '../takeoff/index.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
@@ -102,6 +103,12 @@ function upliftKN(option: WorkedOption): number {
   return Math.max(0, ...ends.map((end) => -(end.permanentKN + Math.min(0, end.trafficMinKN))));
 }
 
+/** Highest utilisation of any check; one that stands at its limit to the last digit is at it. */
+function highestUse(designs: WorkedOption['designs']): number {
+  const failed = cannotCarry(designs);
+  return failed?.utilisation ?? Math.min(1, Math.max(...designs.map((d) => d.limitingCheck.utilisation)));
+}
+
 /** Everything known of a worked and priced option. `budgetChance` is unknown without a budget. */
 export function optionFacts(
   study: Study,
@@ -127,7 +134,7 @@ export function optionFacts(
     prestressed: quantitiesOf(design.lines).prestressKg > 0,
     supportDepthM: design.depthM.support,
     midspanDepthM: design.depthM.midspan,
-    limitingUtilisation: Math.max(...option.designs.map((d) => d.limitingCheck.utilisation)),
+    limitingUtilisation: highestUse(option.designs),
     clearanceConfirmed: clearances.every((clearance) => clearance.confirmed),
     upliftKN: upliftKN(option),
     pieceLengthM: Math.max(0, ...pieces.map((piece) => piece.lengthM)),

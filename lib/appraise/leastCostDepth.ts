@@ -1,3 +1,4 @@
+import { carries } from '../forms/index.ts';
 import type { Work } from './work.ts';
 
 /** What one trial depth comes to. */
@@ -23,7 +24,7 @@ const STEPS = 20;
 
 type Tried = readonly [on: number, trial: DepthTrial];
 
-const holds = ([, { utilisation }]: Tried): boolean => utilisation <= 1;
+const holds = ([, { utilisation }]: Tried): boolean => carries(utilisation);
 
 /** Cost at a depth between trials: a parabola against the logarithm of depth through the three about it, a line through two. */
 function costAt(rising: readonly Tried[], on: number): number {

@@ -1,9 +1,11 @@
-import { leastCostDepth } from '../appraise/leastCostDepth.ts';
+import { carryingWords } from '../appraise/carryingWords.ts';
 import { depthMissed } from '../appraise/depthMissed.ts';
 import { depthRange } from '../appraise/depthRange.ts';
+import { depthRulings } from '../appraise/depthRulings.ts';
+import { DEEPEST_M, depthThatCarries, type DepthFound } from '../appraise/depthThatCarries.ts';
 import { liftedSupports } from '../appraise/liftedSupports.ts';
 import { finish } from '../appraise/work.ts';
-import { formModule, sizeableForms } from '../forms/index.ts';
+import { cannotCarry, formModule, sizeableForms } from '../forms/index.ts';
 import type { DeckStrip, Design, FormId, Problem, StandardId, UnitTask } from '../model/index.ts';
 import { standardIds } from '../model/index.ts';
 import { meanRates, ratesFor } from '../price/index.ts';
@@ -34,9 +36,8 @@ const flagNames = [
   'ballast',
   'cast-in',
 ];
-/** The least and the most that can be asked for as a depth, m. */
+/** The least that can be asked for as a depth, m. */
 const FLATTEST_M = 0.01;
-const DEEPEST_M = 40;
 const SURFACING_M = 0.09;
 /** Published factors of skew decks end here. */
 const MOST_SKEW_DEG = 60;
@@ -284,6 +285,11 @@ function readTask(argv: readonly string[]): Asked {
   return { depthM, haunch, task };
 }
 
+/** A reason of a rule as a sentence. */
+function sentenceOf(reason: string): string {
+  return `${reason[0]!.toUpperCase()}${reason.slice(1)}.`;
+}
+
 /** The task at a midspan depth, deeper over the piers where that was asked for. */
 function taskAt({ task, haunch }: Asked, midspanM: number): UnitTask {
   return {
@@ -293,12 +299,12 @@ function taskAt({ task, haunch }: Asked, midspanM: number): UnitTask {
   };
 }
 
-/** The shallowest depth, m, within 1 % of the least cost of the deck at the mean rates that come with the tool. */
-function depthSought(asked: Asked): number {
+/** The depth of least cost of the deck at the mean rates that come with the tool; beyond the published band where none in it carries. */
+function depthSought(asked: Asked): DepthFound {
   const { form, method, spansM } = asked.task;
   const mean = meanRates(ratesFor({ ratePack: 'demo-2026', rates: [] }));
   return finish(
-    leastCostDepth(depthRange(form, method, spansM, asked.task), (trialM) => {
+    depthThatCarries(depthRange(form, method, spansM, asked.task), (trialM) => {
       const { lines, limitingCheck } = formModule(form).size(taskAt(asked, trialM));
       const cost = lines.reduce((sum, line) => sum + line.quantity * mean[line.item]!, 0);
       return { cost, utilisation: limitingCheck.utilisation };
@@ -306,25 +312,53 @@ function depthSought(asked: Asked): number {
   );
 }
 
-/** The depth asked for, or that of least cost; a depth that the form cannot be made near to is refused. */
+/** The depth asked for, or that of least cost; what cannot carry, or cannot be made near to the depth asked for, is refused. */
 function designOf(asked: Asked): Design {
   const module = formModule(asked.task.form);
   const sizeAt = (depthM: number): Design => module.size(taskAt(asked, depthM));
-  if (asked.depthM === undefined) return sizeAt(depthSought(asked));
+  if (asked.depthM === undefined) {
+    const { depthM, triedToM } = depthSought(asked);
+    const design = sizeAt(depthM);
+    if (cannotCarry([design]) === null) return design;
+    const band = depthRange(asked.task.form, asked.task.method, asked.task.spansM, asked.task);
+    const deeper =
+      triedToM === null
+        ? ''
+        : `, and deeper ones beyond it to ${rounded(sizeAt(triedToM).depthM.midspan)} m,`;
+    return refuse([
+      {
+        code: 'refused',
+        path: ['--spans'],
+        expected: 'spans that the form can carry, all checks within their limits',
+        received: `${asked.task.spansM.join(',')} m, of which none can be built: nearest at ${rounded(depthM)} m deep, ${carryingWords(design)}`,
+        remedy: `Depths of the published band, ${band.map((end) => rounded(end)).join(' to ')} m${deeper} do not carry: give shorter spans, fewer lanes or another form`,
+      },
+    ]);
+  }
   const design = sizeAt(asked.depthM);
-  if (depthMissed(design) === null) return design;
-  // Beams come in steps of depth: whatever is asked for, none is shallower or deeper than these.
-  const [least, most] = [FLATTEST_M, DEEPEST_M].map((depthM) => sizeAt(depthM).depthM.midspan) as [
-    number,
-    number,
-  ];
-  if (asked.depthM >= least && asked.depthM <= most) return design;
+  if (depthMissed(design) !== null) refuseWhatBeamsCannotMake(asked.depthM, sizeAt);
+  if (cannotCarry([design]) === null) return design;
   return refuse([
     {
-      code: asked.depthM < least ? 'too-small' : 'too-large-value',
+      code: 'refused',
+      path: ['--depth'],
+      expected: 'a depth at which all checks are within their limits',
+      received: `${asked.depthM} m, ${carryingWords(design)}`,
+      remedy: 'leave --depth out for that of least cost that carries, or give shorter spans',
+    },
+  ]);
+}
+
+/** Beams come in steps of depth: a depth shallower or deeper than all of them is refused. */
+function refuseWhatBeamsCannotMake(depthM: number, sizeAt: (depthM: number) => Design): void {
+  const [least, most] = [FLATTEST_M, DEEPEST_M].map((end) => sizeAt(end).depthM.midspan) as [number, number];
+  if (depthM >= least && depthM <= most) return;
+  refuse([
+    {
+      code: depthM < least ? 'too-small' : 'too-large-value',
       path: ['--depth'],
       expected: `a depth this form can be made with, ${rounded(least)} to ${rounded(most)}`,
-      received: String(asked.depthM),
+      received: String(depthM),
       unit: 'm',
       remedy: 'give a depth between them, or leave --depth out for that of least cost',
     },
@@ -334,7 +368,8 @@ function designOf(asked: Asked): Design {
 /**
  * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
  * `--skew` is the skew of the supports from square, degrees, either way; spans are those along the road.
- * Without a depth the one of least cost in the published band is taken. Concrete boxes read `--box-width`
+ * Without a depth the one of least cost in the published band is taken, beyond it where none inside carries. What cannot
+ * carry is refused with the checks that stand in the way. Concrete boxes read `--box-width`
  * (between the axes of the outer webs, m), `--strength` (MPa), `--light` (oven-dry density, kg/m3; with `--light-middles`
  * only a length about the middle of each span, m), and `--ballast` (kN/m by span); cantilevered ones `--cast-in` (piers in
  * the middle that the deck is cast in with).
@@ -362,6 +397,9 @@ export function sizeCommand(argv: readonly string[]): Said {
         warnings: [
           ...(asked.depthM === undefined || missed === null ? [] : [missed]),
           ...design.warnings,
+          ...depthRulings(design).map(
+            ({ because, source }) => `${sentenceOf(because[0]!)} Source: ${source}.`,
+          ),
           ...liftedSupports(design),
         ],
       }),

@@ -53,11 +53,39 @@ describe('size', () => {
     expect(near.warnings[0]).toContain(
       `1.20 m was asked for; with the beams there are it is ${near.depthM.midspan}`,
     );
-    expect(size(`${boxes} --depth ${near.depthM.midspan}`).warnings).toEqual([]);
+    const made = size(`${boxes} --depth ${near.depthM.midspan}`).warnings;
+    expect(made.filter((text) => text.includes('asked for'))).toEqual([]);
     const refused = answer(sizeCommand, `${boxes} --depth 2.5`);
     expect(refused.code).toBe(2);
     const most = Number(/ to ([0-9.]+) m, received 2.5 m/.exec(refused.err)![1]);
     expect(size(`${boxes} --depth ${most}`).depthM.midspan).toBe(most);
+  });
+
+  it('size(what cannot be built) is refused with its worst check, the share of own weight and how deep it was tried', () => {
+    const printed = answer(sizeCommand, '--form cantilever-box --spans 240,400,240 --width 12 --lanes 3');
+    expect(printed.code).toBe(2);
+    expect(printed.out).toBe('');
+    expect(printed.err).toMatch(
+      /^spans: expected .* received 240,400,240 m.* at \d{3} % of its limit \([0-9.e+]+ of [0-9.e+]+ \S+\)/,
+    );
+    expect(Number(/own weight is (\d+) %/.exec(printed.err)![1])).toBeGreaterThan(80);
+    const [, most, triedTo] =
+      /published band, [0-9.]+ to ([0-9.]+) m, and deeper ones beyond it to ([0-9.]+) m/.exec(printed.err)!;
+    expect(Number(triedTo)).toBeGreaterThan(Number(most));
+  });
+
+  it('size(--depth) that cannot carry is refused with the numbers, and one beyond the published band is said to be', () => {
+    const line = '--form composite-i --spans 60,80,60 --width 12 --lanes 3';
+    const refused = answer(sizeCommand, `${line} --depth 0.9`);
+    expect(refused.code).toBe(2);
+    expect(refused.err).toMatch(/^depth: expected .* received 0.9 m, .* at \d+ % of its limit/);
+    const deep = size(`${line} --depth 9`).warnings.filter((text) =>
+      text.includes('outside the published band'),
+    );
+    expect(deep).toHaveLength(1);
+    expect(deep[0]).toMatch(/Depth 1\/8.9 of the span.* 1\/31 to 1\/20.*Source: AASHTO/);
+    const within = size(`${line} --depth 3.1`).warnings.filter((text) => text.includes('published band'));
+    expect(within).toEqual([]);
   });
 
   it.each([

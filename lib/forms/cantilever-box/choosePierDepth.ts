@@ -1,5 +1,6 @@
 import type { UnitTask } from '../../model/index.ts';
-import { depthBand } from '../../rules/index.ts';
+import { depthBand, midspanDepthBand } from '../../rules/index.ts';
+import { carries } from '../common/carries.ts';
 import { limiting } from '../common/checks.ts';
 import type { Check } from '../../model/index.ts';
 import { cantileverData } from './cantileverData.ts';
@@ -20,22 +21,21 @@ export interface HaunchedDeck {
   readonly checks: readonly Check[];
 }
 
-/** Utilisation up to which a check holds: strands are whole, so that it may stand at 1 to the last digit. */
-const holding = 1.0001;
 /** Growth of the inertia with the depth that the first beam is made with; the sections found then say better. */
 const firstPower = 3;
 /** Difference of that power which asks for another beam. */
 const samePower = 0.25;
 
 /**
- * Depths over the piers across the published band, deepest first (a shallower box is nowhere thinner, so that each starts
+ * Depths over the piers across the published band (with a midspan beyond its own band as far beyond this), deepest first (a shallower box is nowhere thinner, so that each starts
  * from the one before), none less than at midspan: the one with the least worth of concrete
  * and strand among those that hold; where none holds the one that comes nearest, with upright webs if those do better.
  */
 export function choosePierDepth(task: UnitTask): HaunchedDeck {
   const base = cantileverBase(task);
   const count = cantileverData.depthTrials.value;
-  const [least, most] = depthBand('cantilever-box', 'continuous');
+  const [least, inBand] = depthBand('cantilever-box', 'continuous');
+  const most = inBand * beyondBand(task.depthM / base.governingM);
   const depths =
     base.arms.length === 0
       ? [task.depthM]
@@ -56,11 +56,16 @@ export function choosePierDepth(task: UnitTask): HaunchedDeck {
     before = trial;
   }
   // Upright webs leave more width to the bottom slab, where the depth alone does not do.
-  if (best!.use > holding && base.arms.length > 0) {
+  if (!carries(best!.use) && base.arms.length > 0) {
     const upright = trialOf(sized(base, best!.deck.model.pierDepthM, best!.deck, true));
     if (better(upright, best!)) best = upright;
   }
   return best!.deck;
+}
+
+/** How many times the deepest published depth a midspan is, none less than once: over the piers as much is tried beyond the band. */
+function beyondBand(midspanRatio: number): number {
+  return Math.max(1, midspanRatio / midspanDepthBand('cantilever-box')![1]);
 }
 
 interface Trial {
@@ -74,8 +79,8 @@ function trialOf(deck: HaunchedDeck): Trial {
 }
 
 function better(one: Trial, other: Trial): boolean {
-  const holds = one.use <= holding;
-  if (holds !== other.use <= holding) return holds;
+  const holds = carries(one.use);
+  if (holds !== carries(other.use)) return holds;
   return holds ? one.worth < other.worth : one.use < other.use;
 }
 

@@ -1,4 +1,5 @@
 import type { UnitTask } from '../../model/index.ts';
+import { carries } from '../common/carries.ts';
 import { limiting } from '../common/checks.ts';
 import type { Check } from '../../model/index.ts';
 import { sizeSteelBox, type SizedSteelBox } from './sizeSteelBox.ts';
@@ -11,9 +12,6 @@ export interface SteelBoxDeck {
   readonly box: SizedSteelBox;
   readonly checks: readonly Check[];
 }
-
-/** Utilisation up to which a check holds. */
-const holding = 1.0001;
 
 /** Depths over the piers that are tried where there may be a haunch, deeper than in the spans: the one asked for, or published ones. */
 function haunches(task: UnitTask): number[] {
@@ -48,7 +46,7 @@ export function choosePierDepth(task: UnitTask): SteelBoxDeck {
     (!task.haunch && task.depthM >= steelBoxData.haunch.constantOverSpan * governing)
   ) {
     best = trialOf(task, task.depthM, false, null);
-    if (deeper.length === 0 && best.use > holding) best = least(best, trialOf(task, task.depthM, true, null));
+    if (deeper.length === 0 && !carries(best.use)) best = least(best, trialOf(task, task.depthM, true, null));
   }
   for (const depthM of deeper) {
     const trial = trialOf(task, depthM, true, best);
@@ -68,7 +66,7 @@ function trialOf(task: UnitTask, pierDepthM: number, upright: boolean, before: T
 
 /** The better of two, the first where they are equal. */
 function least(one: Trial, other: Trial): Trial {
-  const holds = other.use <= holding;
-  if (holds !== one.use <= holding) return holds ? other : one;
+  const holds = carries(other.use);
+  if (holds !== carries(one.use)) return holds ? other : one;
   return (holds ? other.kg < one.kg : other.use < one.use) ? other : one;
 }
