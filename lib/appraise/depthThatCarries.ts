@@ -3,13 +3,18 @@ import { leastCostDepth, type DepthTrial } from './leastCostDepth.ts';
 import type { Work } from './work.ts';
 
 /** Beyond a band the depth grows by this factor from one trial to the next. */
-const STRIDE = 1.22;
-/** So many trials in a row that carry less than the best before them end the walk: deeper is no stronger any more. */
-const WEAKER = 2;
+const STRIDE = 1.15;
+/** A section more than so many times as deep as published ones are is another form; common practice, no source. */
+const DEEPEST_OVER_BAND = 2;
 /** No depth beyond this is tried, m. */
 export const DEEPEST_M = 40;
 /** Depths are drawn to 50 mm: 20 steps to the metre. */
 const STEPS = 20;
+
+/** About the depth that comes nearest to carrying, factors to either side. */
+const CLOSER = [STRIDE ** (1 / 2), STRIDE ** (1 / 4)];
+
+const onGrid = (depthM: number): number => Math.round(depthM * STEPS) / STEPS;
 
 /** A depth, m, and the deepest that was tried beyond the band for want of one inside it; null where none was needed. */
 export interface DepthFound {
@@ -19,7 +24,7 @@ export interface DepthFound {
 
 /**
  * The depth of least cost inside a published band (see `leastCostDepth`). The edge of the band is no physical limit: where
- * nothing inside carries, deeper sections are tried until one does or deeper is no stronger; among those beyond the band
+ * nothing inside carries, deeper sections, to twice as deep, are tried until one does; among those beyond the band
  * that carry the one of least cost is taken. Where none carries it is the depth that comes nearest.
  */
 export function* depthThatCarries(
@@ -38,17 +43,28 @@ export function* depthThatCarries(
   let bestM = insideM;
   let triedToM: number | null = null;
   let beforeM = range[1];
-  for (let weaker = 0; weaker < WEAKER;) {
-    const depthM = Math.ceil(beforeM * STRIDE * STEPS - 1e-9) / STEPS;
-    if (depthM > DEEPEST_M) break;
+  const deepestM = Math.min(DEEPEST_M, DEEPEST_OVER_BAND * range[1]);
+  for (;;) {
+    const depthM =
+      Math.min(Math.ceil(beforeM * STRIDE * STEPS - 1e-9), Math.floor(deepestM * STEPS + 1e-9)) / STEPS;
+    if (depthM <= beforeM) break;
     triedToM = depthM;
     const { utilisation } = once(depthM);
     yield;
     if (carries(utilisation))
       return { depthM: yield* leastCostDepth([beforeM, depthM], once, depthM), triedToM };
-    weaker = utilisation < once(bestM).utilisation ? 0 : weaker + 1;
-    if (weaker === 0) bestM = depthM;
+    if (utilisation < once(bestM).utilisation) bestM = depthM;
     beforeM = depthM;
+  }
+  // About the one that comes nearest in strides that are halved: what carries may be no wider than a stride.
+  for (const stride of CLOSER) {
+    for (const depthM of [bestM / stride, bestM * stride].map(onGrid)) {
+      if (depthM < range[0] || depthM > deepestM) continue;
+      const { utilisation } = once(depthM);
+      yield;
+      if (carries(utilisation)) return { depthM, triedToM };
+      if (utilisation < once(bestM).utilisation) bestM = depthM;
+    }
   }
   return { depthM: bestM, triedToM };
 }

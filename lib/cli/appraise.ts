@@ -9,7 +9,7 @@ import { studyFile } from './studyFile.ts';
 
 /** `appraise STUDY.json [--out DIR] [--format json]`: a whole study worked out, as JSON. */
 export function appraiseCommand(argv: readonly string[]): Said {
-  const { values, rest } = readFlags(['out', 'format'], argv, true);
+  const { values, rest } = readFlags(['out', 'format'], argv, { words: true });
   const [file] = rest;
   if (file === undefined || rest.length > 1) {
     return refuse([

@@ -7,7 +7,7 @@ import { studyFile } from './studyFile.ts';
 
 /** `explain STUDY.json PATH ...`: where figures come from, as JSON; a path is e.g. `options/1/cost/p50`. */
 export function explainCommand(argv: readonly string[]): Said {
-  const [file, ...paths] = readFlags([], argv, true).rest;
+  const [file, ...paths] = readFlags([], argv, { words: true }).rest;
   if (file === undefined || paths.length === 0) {
     return refuse([
       {

@@ -5,7 +5,17 @@ import { refuse } from './refusal.ts';
 /** Values of the command line by flag, and what stands without a flag. */
 export interface Flags {
   readonly values: Readonly<Record<string, string | undefined>>;
+  /** Flags without a value that were given. */
+  readonly on: ReadonlySet<string>;
   readonly rest: readonly string[];
+}
+
+/** What a command line may have besides flags with values. */
+export interface AlsoTaken {
+  /** Flags without a value. */
+  readonly switches?: readonly string[];
+  /** Words without a flag. */
+  readonly words?: boolean;
 }
 
 /** A negative number after a flag is its value and not another flag: `--span -3` is read as `--span=-3`. */
@@ -22,23 +32,37 @@ function joined(words: readonly string[]): string[] {
  *
  * @param names the flags there are
  * @param argv the command line after the name of the command
- * @param takesWords whether words without a flag may stand among them
+ * @param also switches and words that may stand among them
  * @throws Refusal where a flag is not known or has no value, or where a word may not stand
  */
-export function readFlags(names: readonly string[], argv: readonly string[], takesWords = false): Flags {
+export function readFlags(
+  names: readonly string[],
+  argv: readonly string[],
+  { switches = [], words = false }: AlsoTaken = {},
+): Flags {
   try {
     const { values, positionals } = parseArgs({
       args: joined(argv),
-      options: Object.fromEntries(names.map((name) => [name, { type: 'string' as const }])),
-      allowPositionals: takesWords,
+      options: Object.fromEntries([
+        ...names.map((name) => [name, { type: 'string' as const }] as const),
+        ...switches.map((name) => [name, { type: 'boolean' as const }] as const),
+      ]),
+      allowPositionals: words,
     });
-    return { values, rest: positionals };
+    const given = Object.entries(values);
+    return {
+      values: Object.fromEntries(
+        given.filter((entry): entry is [string, string] => typeof entry[1] === 'string'),
+      ),
+      on: new Set(given.filter(([, value]) => value === true).map(([name]) => name)),
+      rest: positionals,
+    };
   } catch (error) {
     return refuse([
       {
         code: 'unknown-key',
         path: ['command line'],
-        expected: names.map((name) => `--${name}`).join(', '),
+        expected: [...names, ...switches].map((name) => `--${name}`).join(', '),
         received: error instanceof Error ? error.message : String(error),
         remedy: 'see README.md for the flags of each command',
       },

@@ -2,7 +2,8 @@ import { Refusal } from './refusal.ts';
 import type { Said } from './said.ts';
 
 /** `main COMMAND ...`: each command is read only when it is asked for. */
-const commands: Readonly<Record<string, () => Promise<(argv: readonly string[]) => Said>>> = {
+type Command = (argv: readonly string[], say: (line: string) => void) => Said;
+const commands: Readonly<Record<string, () => Promise<Command>>> = {
   appraise: async () => (await import('./appraise.ts')).appraiseCommand,
   evidence: async () => (await import('./evidence.ts')).evidenceCommand,
   explain: async () => (await import('./explain.ts')).explainCommand,
@@ -17,7 +18,7 @@ if (load === undefined) {
   process.exit(2);
 }
 try {
-  const { out, notes = [], code = 0 } = (await load())(argv);
+  const { out, notes = [], code = 0 } = (await load())(argv, (line) => process.stderr.write(`${line}\n`));
   process.stdout.write(out);
   for (const note of notes) process.stderr.write(`${note}\n`);
   process.exitCode = code;

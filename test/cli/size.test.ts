@@ -74,6 +74,23 @@ describe('size', () => {
     expect(Number(triedTo)).toBeGreaterThan(Number(most));
   });
 
+  it('size(--limit) prints the span at which a limit is hit with its name, says each span it tries, and takes no depth', () => {
+    const line = '--form precast-i --spans 30 --width 12 --lanes 3 --limit';
+    const said: string[] = [];
+    const found = JSON.parse(sizeCommand(line.split(' '), (text) => said.push(text)).out) as {
+      limitingSpanM: number;
+      limit: string;
+      carries: { spanM: number; limitingCheck: { utilisation: number } };
+      ownWeightHalfM: number | null;
+    };
+    expect(found.limitingSpanM).toBeGreaterThan(found.carries.spanM);
+    expect(found.carries.limitingCheck.utilisation).toBeLessThanOrEqual(1.0001);
+    expect(found.limit.length).toBeGreaterThan(5);
+    expect(said.length).toBeGreaterThan(5);
+    expect(new Set(said).size).toBe(said.length);
+    expect(answer(sizeCommand, `${line} --depth 2`).err).toMatch(/^depth: expected nothing with --limit/);
+  });
+
   it('size(--depth) that cannot carry is refused with the numbers, and one beyond the published band is said to be', () => {
     const line = '--form composite-i --spans 60,80,60 --width 12 --lanes 3';
     const refused = answer(sizeCommand, `${line} --depth 0.9`);
