@@ -9,6 +9,7 @@ import {
   type Unit,
   type Variant,
 } from '../model/index.ts';
+import { onGrid } from './depthGrid.ts';
 import { depthRange } from './depthRange.ts';
 import { depthThatCarries } from './depthThatCarries.ts';
 import type { DepthTrial } from './leastCostDepth.ts';
@@ -99,7 +100,7 @@ function firstTryM(
   const [least, most] = depthsToTry(bench, option, mainUnit(option.units));
   const share =
     haunchRatio !== undefined ? FIRST_TRY.haunched : substringers ? FIRST_TRY.substringers : FIRST_TRY.other;
-  return Math.round(Math.min(most, Math.max(least, share * plainM)) * 20) / 20;
+  return onGrid(Math.min(most, Math.max(least, share * plainM)));
 }
 
 /**

@@ -31,7 +31,7 @@ export function depthRange(
   const least = Math.max(
     band[0] * governing,
     windowOf(form, 'midspanDepthM', ['to confirm'])?.[0] ?? 0,
-    formModule(form).leastDepthM?.({ deck, standard }) ?? 0,
+    formModule(form).leastDepthM?.({ deck, standard, spansM }) ?? 0,
   );
   return [least, Math.max(least, band[1] * governing)];
 }

@@ -1,4 +1,5 @@
 import { carries } from '../forms/index.ts';
+import { onGrid } from './depthGrid.ts';
 import { leastCostDepth, type DepthTrial } from './leastCostDepth.ts';
 import type { Work } from './work.ts';
 
@@ -8,13 +9,9 @@ const STRIDE = 1.15;
 const DEEPEST_OVER_BAND = 2;
 /** No depth beyond this is tried, m. */
 export const DEEPEST_M = 40;
-/** Depths are drawn to 50 mm: 20 steps to the metre. */
-const STEPS = 20;
 
 /** About the depth that comes nearest to carrying, factors to either side. */
 const CLOSER = [STRIDE ** (1 / 2), STRIDE ** (1 / 4)];
-
-const onGrid = (depthM: number): number => Math.round(depthM * STEPS) / STEPS;
 
 /** A depth, m, and the deepest that was tried beyond the band for want of one inside it; null where none was needed. */
 export interface DepthFound {
@@ -45,8 +42,7 @@ export function* depthThatCarries(
   let beforeM = range[1];
   const deepestM = Math.min(DEEPEST_M, DEEPEST_OVER_BAND * range[1]);
   for (;;) {
-    const depthM =
-      Math.min(Math.ceil(beforeM * STRIDE * STEPS - 1e-9), Math.floor(deepestM * STEPS + 1e-9)) / STEPS;
+    const depthM = onGrid(Math.min(STRIDE * beforeM, deepestM));
     if (depthM <= beforeM) break;
     triedToM = depthM;
     const { utilisation } = once(depthM);

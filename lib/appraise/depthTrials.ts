@@ -1,5 +1,6 @@
 import type { AppraisedOption, MadeOption, Study } from '../model/index.ts';
 import { survey } from '../site/index.ts';
+import { onGrid, stepsPerM } from './depthGrid.ts';
 import { depthRange } from './depthRange.ts';
 import { spansOf } from './askedTask.ts';
 import { mainUnit } from './workOption.ts';
@@ -8,8 +9,6 @@ import { mainUnit } from './workOption.ts';
 const EACH_SIDE = 4;
 /** From one of them to the next. */
 const STRIDE = 1.09;
-/** Depths are drawn to 50 mm: 20 steps to the metre. */
-const STEPS = 20;
 
 /**
  * An option at its own depth of the main unit, m, and at depths about it inside the published band, rising: worked out,
@@ -22,8 +21,8 @@ export function depthTrials(study: Study, worked: AppraisedOption): readonly Mad
   const [least, most] = depthRange(form, method, spansOf(main), survey(study.brief), variant);
   const depths = new Set([ownM]);
   for (let k = -EACH_SIDE; k <= EACH_SIDE; k++) {
-    const depthM = Math.round(ownM * STRIDE ** k * STEPS) / STEPS;
-    const isOwn = Math.abs(depthM - ownM) < 0.5 / STEPS;
+    const depthM = onGrid(ownM * STRIDE ** k);
+    const isOwn = Math.abs(depthM - ownM) < 0.5 / stepsPerM(ownM);
     if (!isOwn && depthM >= least && depthM <= most) depths.add(depthM);
   }
   return [...depths]

@@ -1,4 +1,5 @@
 import { carries } from '../forms/index.ts';
+import { stepsPerM } from './depthGrid.ts';
 import type { Work } from './work.ts';
 
 /** What one trial depth comes to. */
@@ -19,8 +20,6 @@ const STRIDE = 1.22;
 const FINE = 0.08;
 /** Depths read off the curve that are worked out before the shallowest known to do is taken. */
 const LOOKS = 3;
-/** Depths are drawn to 50 mm: 20 steps to the metre. */
-const STEPS = 20;
 
 type Tried = readonly [on: number, trial: DepthTrial];
 
@@ -41,7 +40,7 @@ function costAt(rising: readonly Tried[], on: number): number {
 }
 
 /**
- * The shallowest depth, m, within 1 % of the least cost between two depths, on a grid of 50 mm.
+ * The shallowest depth, m, within 1 % of the least cost between two depths, on the grid on which they are drawn.
  * Depths whose checks hold come first; where none holds the one with the lowest utilisation is returned.
  *
  * Walks from a depth near which the least is looked for, shallower and deeper, until it has left it behind on both sides;
@@ -56,13 +55,14 @@ export function* leastCostDepth(
   tryAt: (depthM: number) => DepthTrial,
   near = range[0] + FIRST_LOOK * (range[1] - range[0]),
 ): Work<number> {
-  const least = Math.ceil(range[0] * STEPS - 1e-9);
-  const most = Math.max(least, Math.floor(range[1] * STEPS + 1e-9));
+  const steps = stepsPerM(range[1]);
+  const least = Math.ceil(range[0] * steps - 1e-9);
+  const most = Math.max(least, Math.floor(range[1] * steps + 1e-9));
   const kept = (step: number): number => Math.min(most, Math.max(least, Math.round(step)));
   const tried = new Map<number, DepthTrial>();
   const visit = function* (on: number): Work<void> {
     if (tried.has(on)) return;
-    tried.set(on, tryAt(on / STEPS));
+    tried.set(on, tryAt(on / steps));
     yield;
   };
   const sorted = (): Tried[] => [...tried].sort((a, b) => a[0] - b[0]);
@@ -70,7 +70,7 @@ export function* leastCostDepth(
     rows.reduce((best, row) => (row[1].cost < best[1].cost ? row : best));
   const flat = (rows: readonly Tried[]): number => (1 + FLAT) * cheapest(rows)[1].cost;
 
-  const start = kept(near * STEPS);
+  const start = kept(near * steps);
   yield* visit(start);
   yield* visit(kept(Math.min(start - 1, start / STRIDE)));
   yield* visit(kept(Math.max(start + 1, start * STRIDE)));
@@ -95,7 +95,7 @@ export function* leastCostDepth(
 
   const holding = sorted().filter(holds);
   if (holding.length === 0) {
-    return sorted().reduce((best, row) => (row[1].utilisation < best[1].utilisation ? row : best))[0] / STEPS;
+    return sorted().reduce((best, row) => (row[1].utilisation < best[1].utilisation ? row : best))[0] / steps;
   }
   // Where the depth beside the best no longer holds, the limit between them is looked for once.
   const rows = sorted();
@@ -112,7 +112,7 @@ export function* leastCostDepth(
     const costs = grid.map((on) => costAt(final, on));
     const limit = look > LOOKS ? flat(final) : (1 + FLAT) * Math.min(...costs);
     const on = grid.find((step, i) => costs[i]! <= limit && (look <= LOOKS || tried.has(step)))!;
-    if (tried.has(on)) return on / STEPS;
+    if (tried.has(on)) return on / steps;
     yield* visit(on);
   }
 }

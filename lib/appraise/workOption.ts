@@ -1,3 +1,4 @@
+import { onGrid } from './depthGrid.ts';
 import { formModule } from '../forms/index.ts';
 import type {
   Design,
@@ -55,15 +56,13 @@ export function depthAlong(site: Site, units: readonly Unit[], designs: readonly
   return { xM, depthM };
 }
 
-/** Depths are drawn to 50 mm: 20 steps to the metre. */
-const STEPS = 20;
 /** Heights under the deck, m, are told apart to this: a unit is not sized anew for a centimetre of ground. */
 const CLEAR_CLASS_M = 0.25;
 
 /** Depth over the inner supports of a haunched unit at a depth at midspan, m. */
 function haunchOf({ haunchRatio }: Variant = {}, depthM: number): Pick<UnitTask, 'haunch'> {
   if (haunchRatio === undefined) return {};
-  return { haunch: { pierDepthM: Math.round(haunchRatio * depthM * STEPS) / STEPS, law: 'parabolic' } };
+  return { haunch: { pierDepthM: onGrid(haunchRatio * depthM), law: 'parabolic' } };
 }
 
 function taskOf(
@@ -188,9 +187,7 @@ function atDepths(bench: Workbench, option: MadeOption, depthsM: readonly number
 export function depthsOf(bench: Workbench, option: MadeOption, depthM: number): number[] {
   const table = bench.tables.tableFor(option);
   return option.units.map((unit) =>
-    unit.role === 'main'
-      ? depthM
-      : Math.round(table.depthM(unit.form, Math.max(...spansOf(unit))) * STEPS) / STEPS,
+    unit.role === 'main' ? depthM : onGrid(table.depthM(unit.form, Math.max(...spansOf(unit)))),
   );
 }
 

@@ -47,10 +47,10 @@ export interface FormModule {
    */
   variants?(spansM: readonly number[], deck: DeckSpec, method: MethodId): readonly Variant[];
   /**
-   * Least structural depth, m, that practical parts leave whatever the span, where a short span needs more than its
+   * Least structural depth, m, that practical parts or a published minimum leave, where a short span needs more than its
    * published ratio; absent where the published bands hold down to the shortest span.
    */
-  leastDepthM?(task: Pick<UnitTask, 'standard' | 'deck'>): number;
+  leastDepthM?(task: Pick<UnitTask, 'standard' | 'deck' | 'spansM'>): number;
   /**
    * Sizes one unit. Always returns a design; where a limit cannot be met within practical plates, strands or bars the
    * offending check has a utilisation above 1 and a warning says so (the option-stage rule then puts the option out).

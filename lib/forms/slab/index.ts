@@ -7,6 +7,7 @@ import { curveWarning } from '../common/curveWarning.ts';
 import { overLimit } from '../common/warnings.ts';
 import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
+import { leastDepthM } from './optionalDepth.ts';
 import { sizeSlab } from './sizeSlab.ts';
 import { slabChecks } from './slabChecks.ts';
 import { slabElevation, slabSectionCuts } from './slabDrawing.ts';
@@ -25,6 +26,7 @@ export const slab: FormModule = {
   pattern: { kind: 'continuous' },
   methods: ['falsework'],
   readsSkew: true,
+  leastDepthM,
   size,
 };
 
