@@ -43,7 +43,7 @@ export function readFlags(
   try {
     const { values, positionals } = parseArgs({
       args: joined(argv),
-      options: Object.fromEntries([
+      options: Object.fromEntries<{ readonly type: 'string' | 'boolean' }>([
         ...names.map((name) => [name, { type: 'string' as const }] as const),
         ...switches.map((name) => [name, { type: 'boolean' as const }] as const),
       ]),
