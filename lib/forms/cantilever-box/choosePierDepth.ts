@@ -27,9 +27,10 @@ const firstPower = 3;
 const samePower = 0.25;
 
 /**
- * Depths over the piers across the published band (with a midspan beyond its own band as far beyond this), deepest first (a shallower box is nowhere thinner, so that each starts
- * from the one before), none less than at midspan: the one with the least worth of concrete
- * and strand among those that hold; where none holds the one that comes nearest, with upright webs if those do better.
+ * Depths over the piers across the published band (with a midspan beyond its own band as far beyond this), deepest first
+ * (a shallower box is nowhere thinner, so that each starts from the one before), none less than at midspan: the one with
+ * the least worth of concrete and strand among those that hold; where none holds the one that comes nearest, with
+ * upright webs if those do better.
  */
 export function choosePierDepth(task: UnitTask): HaunchedDeck {
   const base = cantileverBase(task);
