@@ -1,12 +1,18 @@
+import adjacentBox from '../../data/evidence/adjacent-box.json';
+import cableStayed from '../../data/evidence/cable-stayed.json';
 import cables from '../../data/evidence/cables.json';
 import cantileverBox from '../../data/evidence/cantilever-box.json';
 import compositeBox from '../../data/evidence/composite-box.json';
 import compositeI from '../../data/evidence/composite-i.json';
+import concreteBox from '../../data/evidence/concrete-box.json';
 import loads from '../../data/evidence/loads.json';
 import mechanics from '../../data/evidence/mechanics.json';
 import precastI from '../../data/evidence/precast-i.json';
+import precastTrough from '../../data/evidence/precast-trough.json';
 import sections from '../../data/evidence/sections.json';
+import slab from '../../data/evidence/slab.json';
 import steelBox from '../../data/evidence/steel-box.json';
+import truss from '../../data/evidence/truss.json';
 import { evidenceCases } from './cases/index.ts';
 import { evidenceFile, type EvidenceRow } from './evidenceRow.ts';
 import { runEvidence, type EvidenceLine } from './runEvidence.ts';
@@ -17,11 +23,17 @@ const files: Readonly<Record<string, unknown>> = {
   loads,
   sections,
   cables,
+  slab,
+  'precast-i': precastI,
+  'precast-trough': precastTrough,
+  'adjacent-box': adjacentBox,
   'composite-i': compositeI,
   'composite-box': compositeBox,
-  'precast-i': precastI,
+  'concrete-box': concreteBox,
   'cantilever-box': cantileverBox,
   'steel-box': steelBox,
+  truss,
+  'cable-stayed': cableStayed,
 };
 
 /** Names of the files read, with their ending. */

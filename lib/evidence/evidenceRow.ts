@@ -1,5 +1,13 @@
 import { z } from '../zod.ts';
 
+/**
+ * What a comparison can say of the tool: `mechanics` are forces, stresses, loads and section properties of theory, of a
+ * reference table or of a worked example; `designed` and `built` are quantities or leading dimensions of a designed
+ * example and of a built bridge; `law` is a rule of thumb, from memory or of our own working, only reported against.
+ */
+export const evidenceKinds = ['mechanics', 'designed', 'built', 'law'] as const;
+export type EvidenceKind = (typeof evidenceKinds)[number];
+
 const scalar = z.union([z.number(), z.string(), z.boolean()]);
 
 /** One comparison with something outside the project: a case, its inputs and the values published for it. */
@@ -7,6 +15,7 @@ export const evidenceRow = z.strictObject({
   id: z.string().min(1),
   /** What it is about, printed as a heading: 'mechanics', 'loads', 'sections', 'cables' or the id of a form. */
   subject: z.string().min(1),
+  kind: z.enum(evidenceKinds),
   title: z.string().min(1),
   /** Name of the calculation in `lib/evidence/cases` that works out ours. */
   case: z.string().min(1),
@@ -27,6 +36,8 @@ export const evidenceRow = z.strictObject({
   /** True when the value was read in the source, false when it is from memory or worked out independently. */
   read: z.boolean(),
   note: z.string().optional(),
+  /** Why ours deviates, written after a check by hand. The worst case of a subject and every case outside its tolerance need one. */
+  cause: z.string().min(1).optional(),
 });
 
 export type EvidenceRow = z.infer<typeof evidenceRow>;

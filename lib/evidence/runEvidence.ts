@@ -1,10 +1,11 @@
 import { caseInputs, type EvidenceCase } from './caseInputs.ts';
-import type { EvidenceRow } from './evidenceRow.ts';
+import type { EvidenceKind, EvidenceRow } from './evidenceRow.ts';
 
 /** One published value beside ours. */
 export interface EvidenceLine {
   readonly id: string;
   readonly subject: string;
+  readonly kind: EvidenceKind;
   readonly title: string;
   readonly figure: string;
   readonly unit: string;
@@ -19,6 +20,8 @@ export interface EvidenceLine {
   readonly source: string;
   readonly read: boolean;
   readonly note?: string;
+  /** Why ours deviates, as far as a check by hand has shown. */
+  readonly cause?: string;
 }
 
 /**
@@ -47,6 +50,7 @@ export function runEvidence(
       return {
         id: row.id,
         subject: row.subject,
+        kind: row.kind,
         title: row.title,
         figure,
         unit: row.unit,
@@ -59,6 +63,7 @@ export function runEvidence(
         source: row.source,
         read: row.read,
         ...(row.note === undefined ? {} : { note: row.note }),
+        ...(row.cause === undefined ? {} : { cause: row.cause }),
       };
     });
   });
@@ -69,4 +74,9 @@ function isWithin(row: EvidenceRow, ours: number, published: number): boolean | 
   if (row.tolerance === null) return null;
   const allowed = Math.max(row.tolerance * Math.abs(published), row.absolute ?? 0);
   return Math.abs(ours - published) <= allowed;
+}
+
+/** Outside its tolerance without a cause written beside it: something has changed that nobody has looked into. */
+export function isUnexplained(line: EvidenceLine): boolean {
+  return line.within === false && line.cause === undefined;
 }

@@ -1,10 +1,19 @@
 import { describe, expect, it } from 'vitest';
-import { caseInputs, evidenceRow, runEvidence, type EvidenceRow } from '../../lib/evidence/index.ts';
-import { summary } from '../../lib/evidence/summary.ts';
+import {
+  caseInputs,
+  evidenceRow,
+  formsWithoutCase,
+  isUnexplained,
+  kindSummaries,
+  runEvidence,
+  summary,
+  type EvidenceRow,
+} from '../../lib/evidence/index.ts';
 
 const row: EvidenceRow = {
   id: 'a',
   subject: 'sums',
+  kind: 'built',
   title: 'Two and two',
   case: 'sum',
   inputs: { terms: [2, 2] },
@@ -57,7 +66,29 @@ describe('runEvidence(rows, cases)', () => {
   });
 });
 
+/** Rows of one figure that ours exceeds by the given shares. */
+const over = (shares: readonly number[], more: Partial<EvidenceRow> = {}): EvidenceRow[] =>
+  shares.map((share, i) => ({ ...row, id: `${more.kind}-${i}`, inputs: { terms: [4, 4 * share] }, ...more }));
+
+describe('isUnexplained(line)', () => {
+  it('is what lies outside without a cause', () => {
+    const [within, outside, explained] = runEvidence(
+      [row, { ...row, published: { sum: 5 } }, { ...row, published: { sum: 5 }, cause: 'Counted twice.' }],
+      cases,
+    );
+    expect([within, outside, explained].map((line) => isUnexplained(line!))).toEqual([false, true, false]);
+  });
+});
+
 describe('evidenceRow', () => {
+  it('asks for a kind and a source', () => {
+    const { kind, ...without } = row;
+    expect(kind).toBe('built');
+    expect(evidenceRow.safeParse(without).success).toBe(false);
+    expect(evidenceRow.safeParse({ ...row, kind: 'rumour' }).success).toBe(false);
+    expect(evidenceRow.safeParse({ ...row, source: undefined }).success).toBe(false);
+  });
+
   it('refuses unknown keys and rows without a value', () => {
     expect(evidenceRow.safeParse({ ...row, ours: 4 }).success).toBe(false);
     expect(evidenceRow.safeParse({ ...row, published: {} }).success).toBe(false);
@@ -73,15 +104,74 @@ describe('summary(lines)', () => {
     expect(summary(lines)).toEqual([
       {
         subject: 'sums',
-        compared: 3,
         within: 1,
         outside: 1,
         shownOnly: 1,
-        worstDeviation: 0.2,
+        cases: 3,
+        figures: 3,
         medianDeviation: 0,
         withinQuarter: 1,
-        worst: { id: 'b', deviation: -0.2 },
+        withinThirty: 1,
+        worst: { id: 'b', figure: 'sum', deviation: -0.2, cause: null },
       },
     ]);
+  });
+});
+
+describe('kindSummaries(lines)', () => {
+  it('works out median and shares and holds them against the aim', () => {
+    const shares = [0.05, 0.12, 0.14, 0.16, 0.28, 0.29, 0.31];
+    const [built] = kindSummaries(runEvidence(over(shares, { kind: 'built', cause: 'Heavy.' }), cases));
+    expect(built).toMatchObject({ kind: 'built', cases: 7, figures: 7 });
+    expect(built!.medianDeviation).toBeCloseTo(0.16, 9);
+    expect(built!.withinQuarter).toBeCloseTo(4 / 7, 9);
+    expect(built!.withinThirty).toBeCloseTo(6 / 7, 9);
+    expect(built!.worst).toMatchObject({ id: 'built-6', cause: 'Heavy.' });
+    expect(built!.aim!.share).toBeCloseTo(6 / 7, 9);
+    expect(built!.aim!.met).toBe(false);
+  });
+
+  it('meets an aim only with the median and the share both', () => {
+    const met = (kind: EvidenceRow['kind'], shares: readonly number[]): boolean | undefined =>
+      kindSummaries(runEvidence(over(shares, { kind }), cases))[0]!.aim?.met;
+    expect(met('built', [0.05, 0.12, 0.14, 0.16, 0.29])).toBe(true);
+    expect(met('built', [0.05, 0.12, 0.14, 0.16, 0.31])).toBe(false);
+    expect(met('designed', [0.05, 0.09, 0.24])).toBe(true);
+    expect(met('designed', [0.05, 0.11, 0.24])).toBe(false);
+    expect(met('designed', [0.05, 0.09, 0.26])).toBe(false);
+  });
+
+  it('keeps the kinds apart and has no aim for mechanics and laws', () => {
+    const rows = [
+      ...over([0, 0, 0], { kind: 'mechanics' }),
+      ...over([0.5], { kind: 'law' }),
+      ...over([0.2], { kind: 'designed' }),
+    ];
+    const kinds = kindSummaries(runEvidence(rows, cases));
+    expect(kinds.map(({ kind, aim }) => [kind, aim?.met])).toEqual([
+      ['mechanics', undefined],
+      ['designed', false],
+      ['law', undefined],
+    ]);
+  });
+});
+
+describe('formsWithoutCase(lines)', () => {
+  it('takes neither mechanics nor a law for a case', () => {
+    const about = (subject: string, kind: EvidenceRow['kind']): EvidenceRow => ({ ...row, subject, kind });
+    const lines = runEvidence(
+      [
+        about('slab', 'law'),
+        about('truss', 'mechanics'),
+        about('precast-i', 'designed'),
+        about('steel-box', 'built'),
+      ],
+      cases,
+    );
+    const without = formsWithoutCase(lines);
+    expect(without).toContain('slab');
+    expect(without).toContain('truss');
+    expect(without).not.toContain('precast-i');
+    expect(without).not.toContain('steel-box');
   });
 });
