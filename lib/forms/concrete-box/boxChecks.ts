@@ -1,8 +1,9 @@
 import { trafficOnInfluence, type TrafficLoad } from '../../actions/index.ts';
 import { beamTrack, deflectionInfluence } from '../../mechanics/index.ts';
-import type { Check } from '../../model/index.ts';
+import type { Check, SupportReaction } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
 import { middleStation } from '../common/middleStation.ts';
+import { bearingChecks } from './boxBearings.ts';
 import { boxData } from './boxData.ts';
 import { boxService } from './boxService.ts';
 import type { BoxModel } from './boxModel.ts';
@@ -13,8 +14,8 @@ import type { BendingUse } from './ultimateBending.ts';
 import { underSlabChecks } from './underSlab.ts';
 import type { SizedBox } from './sizeBox.ts';
 
-/** All limit states of a sized box and of its top slab; labels as they are printed. */
-export function boxChecks(model: BoxModel, box: SizedBox): Check[] {
+/** All limit states of a sized box, of its top slab and of its bearings; labels as they are printed. */
+export function boxChecks(model: BoxModel, box: SizedBox, reactions: readonly SupportReaction[]): Check[] {
   const { tendons, compressions, webs } = box;
   const continuous = model.task.spansM.length > 1;
   const worst = (pick: (e: number) => number): number => {
@@ -70,6 +71,7 @@ export function boxChecks(model: BoxModel, box: SizedBox): Check[] {
       'm',
     ),
     trafficDeflection(model, model.concrete.ecmMPa * 1e3 * box.sections.span.inertiaM4),
+    ...bearingChecks(model, box, reactions),
   ];
   if (box.launch) {
     const { compressionMPa } = box.launch;

@@ -5,6 +5,16 @@ import { cited, citedByStandard } from '../common/cited.ts';
 const source = z.string().min(1);
 const number = z.number();
 
+/** Outward push of vehicles on a curve: share of their weight, height over the road, and what stands there besides. */
+const push = z.object({
+  mostShare: number,
+  radiusOfOneM: number,
+  noneBeyondM: number,
+  heightM: number,
+  withVehicle: number,
+  withUniform: number,
+});
+
 const schema = z.object({
   layout: z.object({ overhangOverSpacing: number, mostWebSpacingM: number, leastBoxM: number, source }),
   ballast: z.object({ weightKNm3: number, mostKNm: number, source }),
@@ -59,6 +69,8 @@ const schema = z.object({
   chamferM: cited,
   leastInnerM: cited,
   diaphragm: z.object({ pierM: number, endM: number, openingM2: number, barsKgM3: number, source }),
+  bearings: z.object({ fromEdgesM: number, source }),
+  centrifugal: z.object({ lm1: push, hl93: push, source }),
   blisters: z.object({ share: number, barsKgM3: number, source }),
   ductCoverM: cited,
   tendons: z.object({ sizes: z.array(z.object({ strands: number, ductM: number })).min(1), source }),

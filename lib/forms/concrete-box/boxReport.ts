@@ -1,6 +1,7 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
+import { bearingsApart } from './boxBearings.ts';
 import { madeFigures } from './boxConcrete.ts';
 import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
@@ -79,6 +80,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     pierAreaM2: sections.pier.areaM2,
     pierInertiaM4: sections.pier.inertiaM4,
     enclosedAreaM2: box.shear.enclosedM2,
+    bearingsApartM: bearingsApart(sections.span.bottomWidthM),
     webTrafficShare: box.shear.webShare,
     tendonCount: tendons.group.tendonsPerWeb * layout.webs,
     strandsPerTendon: tendons.group.strandsPerTendon,

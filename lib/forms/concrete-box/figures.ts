@@ -202,6 +202,16 @@ export const boxFigures: readonly Descriptor[] = [
     'site/deck/carriagewayOffsetM',
     'site/deck/carriagewayM',
   ),
+  sized(
+    'bearingsApartM',
+    'distance of the two bearings under the box',
+    'm',
+    'width of the soffit, less what they stand inside its edges, at least half of it',
+    'webSpacingM',
+    'cells',
+    './task/depthM',
+    'data/concrete-box/bearings/fromEdgesM',
+  ),
   ...tendonFigures,
   sized(
     'endDiaphragmKN',

@@ -47,12 +47,13 @@ function size(task: UnitTask): Design {
   refuse(boxFaults(task));
   const model = boxModel(task);
   const box = sizeBox(model);
-  const checks = boxChecks(model, box);
+  const reactions = boxReactions(model, box);
+  const checks = boxChecks(model, box, reactions);
   const warnings = overLimit(checks, 'tendons and concrete');
   warnings.push(
     ...curveWarning(
       task,
-      'its webs carry the torque of the curve, but uplift of its bearings and overturning are not checked.',
+      'webs and bearings are checked for the torque of the curve, but bending is that of a straight deck.',
     ),
   );
   if (task.method !== 'launch' && !heightUnder(task).known)
@@ -65,7 +66,7 @@ function size(task: UnitTask): Design {
     depthAlong: constantDepth(model.lengthM, task.depthM),
     elevation: boxElevation(model, box),
     sections: boxSections(model, box),
-    reactions: boxReactions(model, box),
+    reactions,
     ...obtuseOf(model.traffic.load),
     checks,
     limitingCheck: limiting(checks),

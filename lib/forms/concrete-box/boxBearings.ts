@@ -1,0 +1,152 @@
+import { trafficTorsion } from '../../actions/index.ts';
+import type { Check, SupportReaction } from '../../model/index.ts';
+import { check } from '../common/checks.ts';
+import { curveTorque } from '../composite-box/tubTorsion.ts';
+import { boxData } from './boxData.ts';
+import type { BoxModel } from './boxModel.ts';
+import type { SizedBox } from './sizeBox.ts';
+
+/** What turns a deck over a support or over all of them about its middle, and what holds it. Characteristic. */
+export interface Turning {
+  /** Lasting reaction, kN, and torque of a curve in plan that goes with it, kNm, outwards positive. */
+  readonly lastingKN: number;
+  readonly outwardKNm: number;
+  /** Torque of eccentric traffic, and of the traffic that may stand there while vehicles push outwards, kNm. */
+  readonly trafficKNm: number;
+  readonly besidePushKNm: number;
+  /** Torque of the vehicles that push outwards on a curve, about the bearings, kNm. */
+  readonly pushKNm: number;
+}
+
+/** Distance of the two bearings under the box at a support, m. */
+export function bearingsApart(bottomWidthM: number): number {
+  return Math.max(0.5 * bottomWidthM, bottomWidthM - boxData.bearings.fromEdgesM);
+}
+
+/** Outward push of vehicles on a curve as a share of their weight. */
+export function pushShare(standard: BoxModel['standardId'], radiusM: number): number {
+  const { mostShare, radiusOfOneM, noneBeyondM } = boxData.centrifugal[standard];
+  return radiusM > noneBeyondM ? 0 : Math.min(mostShare, radiusOfOneM / radiusM);
+}
+
+/**
+ * Lasting torque that a curve in plan brings to each support, kNm, outwards positive: M / R along spans that are held
+ * against turning at every support. Tendons are left out, as they are of the reactions.
+ * @param momentKNm bending moments at the stations, sagging positive
+ */
+export function curveAtSupports(
+  { beam, task }: Pick<BoxModel, 'beam' | 'task'>,
+  momentKNm: Float64Array,
+): number[] {
+  const at = new Array<number>(task.spansM.length + 1).fill(0);
+  task.spansM.forEach((spanM, span) => {
+    const from = beam.supportAt[span]!;
+    const to = beam.supportAt[span + 1]!;
+    const torque = curveTorque(momentKNm.subarray(from, to + 1), spanM / (to - from), task.planRadiusM);
+    at[span]! += torque[0]!;
+    at[span + 1]! -= torque[torque.length - 1]!;
+  });
+  return at;
+}
+
+/** Turning of each support, vehicles of the heaviest row all over it and uniform loads on half of either span. */
+function turningAt(model: BoxModel, box: SizedBox, reactions: readonly SupportReaction[]): Turning[] {
+  const { task, standard, standardId, superimposed, traffic } = model;
+  const { spansM, deck, planRadiusM, depthM } = task;
+  const { heightM, withVehicle, withUniform } = boxData.centrifugal[standardId];
+  const torsion = trafficTorsion(standardId, deck);
+  const heaviestKN = Math.max(
+    ...standard.vehicles.map((v) => v.axles.reduce((sum, axle) => sum + axle.loadKN, 0)),
+  );
+  const armM = depthM + deck.surfacingM + heightM;
+  const pushKNm = pushShare(standardId, planRadiusM) * traffic.load.vehicleFactor * heaviestKN * armM;
+  const outwardKNm = curveAtSupports(
+    model,
+    box.own.effects.momentKNm.map((own, i) => own + superimposed.momentKNm[i]!),
+  );
+  return reactions.map(({ permanentKN }, j) => {
+    const besideM = ((spansM[j - 1] ?? 0) + (spansM[j] ?? 0)) / 2;
+    const vehicleKNm = torsion.vehicleTorqueKNm;
+    const uniformKNm = (torsion.udlTorqueKNmPerM + torsion.footwayTorqueKNmPerM) * besideM;
+    return {
+      lastingKN: permanentKN,
+      outwardKNm: outwardKNm[j]!,
+      trafficKNm: vehicleKNm + uniformKNm,
+      besidePushKNm: withVehicle * vehicleKNm + withUniform * uniformKNm,
+      pushKNm,
+    };
+  });
+}
+
+/** The deck on all its supports at once: one row of vehicles on it. */
+function together(all: readonly Turning[], vehicleKNm: number, withVehicle: number): Turning {
+  const sum = (pick: (one: Turning) => number): number => all.reduce((total, one) => total + pick(one), 0);
+  const spare = all.length - 1;
+  return {
+    lastingKN: sum((one) => one.lastingKN),
+    outwardKNm: sum((one) => one.outwardKNm),
+    trafficKNm: sum((one) => one.trafficKNm) - spare * vehicleKNm,
+    besidePushKNm: sum((one) => one.besidePushKNm) - spare * withVehicle * vehicleKNm,
+    pushKNm: all[0]!.pushKNm,
+  };
+}
+
+/**
+ * Design moments about the bearings of one side, kNm: what turns the deck over them and what holds it. Traffic that makes
+ * a torque presses at least so much that it stands no farther out than the outer lane, and a curve carries what it presses
+ * as far out as the lasting load. The worse of the two sides, with vehicles pushing outwards and without.
+ */
+export function turnedOver(
+  turning: Turning,
+  apartM: number,
+  farthestM: number,
+  factors: { readonly favourable: number; readonly traffic: number },
+): { readonly overKNm: number; readonly heldKNm: number } {
+  const { lastingKN, outwardKNm, trafficKNm, besidePushKNm, pushKNm } = turning;
+  const offM = lastingKN > 0 ? outwardKNm / lastingKN : 0;
+  const sides = [1, -1].map((side) => {
+    const net = (torqueKNm: number): number =>
+      torqueKNm + (farthestM > 0 ? (torqueKNm / farthestM) * (side * offM - apartM / 2) : 0);
+    const push = side > 0 ? pushKNm : 0;
+    const moving = Math.max(0, net(trafficKNm), net(besidePushKNm) + push);
+    const lasting = side * outwardKNm;
+    return {
+      overKNm: factors.favourable * Math.max(0, lasting) + factors.traffic * moving,
+      heldKNm: factors.favourable * ((lastingKN * apartM) / 2 + Math.max(0, -lasting)),
+    };
+  });
+  return sides.reduce((worst, next) =>
+    next.overKNm * worst.heldKNm > worst.overKNm * next.heldKNm ? next : worst,
+  );
+}
+
+/** Uplift of one of two bearings at the worst support, and overturning of the deck about the bearings of one side. */
+export function bearingChecks(
+  model: BoxModel,
+  box: SizedBox,
+  reactions: readonly SupportReaction[],
+): Check[] {
+  const { deck } = model.task;
+  const { uls } = model.standard.factors;
+  const factors = { favourable: uls.permanentFavourable, traffic: uls.traffic };
+  const apartM = bearingsApart(box.sections.span.bottomWidthM);
+  const farthestM = (deck.carriagewayM - model.standard.lanes.widthM) / 2 + Math.abs(deck.carriagewayOffsetM);
+  const all = turningAt(model, box, reactions);
+  const uplifts = all.map((turning) => {
+    const { overKNm, heldKNm } = turnedOver(turning, apartM, farthestM, factors);
+    return check(
+      'bearing-uplift',
+      'uplift of one of two bearings under the box',
+      overKNm / apartM,
+      heldKNm / apartM,
+      'kN',
+    );
+  });
+  const { vehicleTorqueKNm } = trafficTorsion(model.standardId, deck);
+  const whole = together(all, vehicleTorqueKNm, boxData.centrifugal[model.standardId].withVehicle);
+  const { overKNm, heldKNm } = turnedOver(whole, apartM, farthestM, factors);
+  return [
+    uplifts.reduce((worst, next) => (next.utilisation > worst.utilisation ? next : worst)),
+    check('overturning', 'overturning about the bearings of one side', overKNm, heldKNm, 'kNm'),
+  ];
+}
