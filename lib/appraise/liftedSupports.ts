@@ -1,4 +1,5 @@
 import { loadStandard } from '../actions/index.ts';
+import { supportUpliftKN } from '../forms/index.ts';
 import type { Design } from '../model/index.ts';
 
 /**
@@ -6,10 +7,9 @@ import type { Design } from '../model/index.ts';
  * that is worse for it, traffic where it lifts.
  */
 export function liftedSupports({ task, reactions }: Pick<Design, 'task' | 'reactions'>): string[] {
-  const { permanent, permanentFavourable, traffic } = loadStandard(task.standard).factors.uls;
-  return reactions.flatMap(({ permanentKN, trafficMinKN }, i) => {
-    const lastingKN = permanentKN * (permanentKN < 0 ? permanent : permanentFavourable);
-    const upliftMN = -(lastingKN + traffic * trafficMinKN) / 1000;
+  const { uls } = loadStandard(task.standard).factors;
+  return reactions.flatMap((reaction, i) => {
+    const upliftMN = supportUpliftKN(reaction, uls) / 1000;
     if (!(upliftMN > 0)) return [];
     const support =
       i === 0 ? 'The first support' : i === reactions.length - 1 ? 'The last support' : `Support ${i + 1}`;

@@ -17,7 +17,7 @@ import { jsonText, type Said } from './said.ts';
  * outside their tolerance go to standard error with their cause. Exit 0 when each of them has one, 1 when one has not.
  */
 export function evidenceCommand(argv: readonly string[]): Said {
-  const { rest } = readFlags([], argv, true);
+  const { rest } = readFlags([], argv, { words: true });
   const [layout] = rest;
   if (rest.length > 1 || (layout !== undefined && layout !== 'table')) {
     return refuse([

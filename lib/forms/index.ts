@@ -15,6 +15,7 @@ import { steelBox } from './steel-box/index.ts';
 import { truss } from './truss/index.ts';
 
 export { cannotCarry, carries } from './common/carries.ts';
+export { supportUpliftKN } from './common/supportUplift.ts';
 export type { FormModule, Pattern } from './formModule.ts';
 
 /** Every form the tool can size, by id. Adding a form is one line here beside its folder. */

@@ -1,6 +1,7 @@
 import { trafficTorsion } from '../../actions/index.ts';
 import type { Check, SupportReaction } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
+import { supportUpliftKN } from '../common/supportUplift.ts';
 import { curveTorque } from '../composite-box/tubTorsion.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
@@ -120,7 +121,10 @@ export function turnedOver(
   );
 }
 
-/** Uplift of one of two bearings at the worst support, and overturning of the deck about the bearings of one side. */
+/**
+ * Uplift of one of two bearings at the worst support, and overturning of the deck about the bearings of one side. A support
+ * that is pulled up as a whole is held down, so its bearings cannot lift one by one.
+ */
 export function bearingChecks(
   model: BoxModel,
   box: SizedBox,
@@ -132,7 +136,8 @@ export function bearingChecks(
   const apartM = bearingsApart(box.sections.span.bottomWidthM);
   const farthestM = (deck.carriagewayM - model.standard.lanes.widthM) / 2 + Math.abs(deck.carriagewayOffsetM);
   const all = turningAt(model, box, reactions);
-  const uplifts = all.map((turning) => {
+  const pressed = all.filter((_, j) => supportUpliftKN(reactions[j]!, uls) <= 0);
+  const uplifts = pressed.map((turning) => {
     const { overKNm, heldKNm } = turnedOver(turning, apartM, farthestM, factors);
     return check(
       'bearing-uplift',
@@ -146,7 +151,7 @@ export function bearingChecks(
   const whole = together(all, vehicleTorqueKNm, boxData.centrifugal[model.standardId].withVehicle);
   const { overKNm, heldKNm } = turnedOver(whole, apartM, farthestM, factors);
   return [
-    uplifts.reduce((worst, next) => (next.utilisation > worst.utilisation ? next : worst)),
+    ...uplifts.toSorted((a, b) => b.utilisation - a.utilisation).slice(0, 1),
     check('overturning', 'overturning about the bearings of one side', overKNm, heldKNm, 'kNm'),
   ];
 }
