@@ -112,6 +112,7 @@ export function arrangementSection(
       station: '3+010',
       title: 'The reference by hand',
       shows: { reference, options },
+      typed: [options],
       body: [
         page.live({ reference, options }, (v) =>
           byHand(

@@ -94,6 +94,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
         station: '1+010',
         title: 'Brief',
         shows: { brief, head },
+        typed: [brief, head],
         body: briefSentences(graph, store),
         notes: (v) => [
           v.head.notice !== '' && h('p', {}, v.head.notice),
@@ -136,6 +137,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
         station: '1+030',
         title: 'Obstacles, water and ground line',
         shows: { brief },
+        typed: [brief],
         body: [obstacleTable(graph, store), waterTable(graph, store), groundTable(graph, store)],
         notes: [
           h(
@@ -155,6 +157,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
         station: '1+040',
         title: 'Deck and ground',
         shows: { brief },
+        typed: [brief],
         body: h('div', { class: 'beside' }, deckField(graph, store), oddsTable(graph, store)),
         notes: [
           h(

@@ -61,6 +61,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
       station: '7+005',
       title: 'Rates',
       shows: { books, asItStands },
+      typed: [books],
       body: h(
         'p',
         { class: 'prose' },

@@ -122,7 +122,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
   const store = studyStore(graph, study, check, () => kept?.mayChange() ?? true);
   if (draft !== null) store.open(study, draft);
   const cells = studyCells(graph, store, workers);
-  const page = sheet(graph, { aside: [cells.byDepth, cells.spanning] });
+  const page = sheet(graph, { aside: [cells.byDepth, cells.spanning], held: store.held });
 
   const saved = h('span', { class: 'state', role: 'status' }, problem);
   const button = (words: string, act: () => void): HTMLElement =>

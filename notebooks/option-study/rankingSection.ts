@@ -140,7 +140,7 @@ export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
     page.cell({
       station: '10+030',
       title: 'Cautions',
-      shows: { brief },
+      shows: {},
       body: h(
         'div',
         { class: 'prose' },

@@ -1,7 +1,9 @@
 import { h } from '../html.ts';
 import type { HtmlChild } from '../html.ts';
 import type { Cell, Graph, Progress, State, Uses, Values } from '../reactive/index.ts';
+import { clock } from './clock.ts';
 import type { Frames } from './frames.ts';
+import type { Hold } from './holding.ts';
 import { lateness } from './lateness.ts';
 import { renew } from './renew.ts';
 import type { Rests } from './rests.ts';
@@ -32,6 +34,8 @@ export interface CellSpec<U extends Uses> {
   readonly awaits?: readonly Cell<unknown>[];
   /** Cells that belong to this station although one further up shows them too. */
   readonly owns?: readonly Cell<unknown>[];
+  /** Cells whose values are typed at this station: it shows them as they are typed, refused or not. */
+  readonly typed?: readonly Cell<unknown>[];
   readonly body: Part<U>;
   readonly notes?: Part<U>;
   /** Body takes the note margin too; notes go below. */
@@ -56,6 +60,12 @@ export interface HostPage {
   /** Where what is off the screen waits to be drawn. */
   readonly rests: Rests;
   readonly sight: Sight;
+  /** Follows whether what is made from some cells is held because an entry is refused. */
+  readonly followHold: (
+    cells: readonly Cell<unknown>[],
+    typed: readonly Cell<unknown>[],
+    tell: () => void,
+  ) => Hold;
   /** A cell has been drawn off the screen, where it is not laid out. */
   readonly drawnUnseen: (element: HTMLElement) => void;
   /** The station this one waits for, if any. */
@@ -80,16 +90,14 @@ export interface CellHost {
   readonly end: () => void;
 }
 
-const clock = (date: Date): string =>
-  [date.getHours(), date.getMinutes(), date.getSeconds()]
-    .map((part) => String(part).padStart(2, '0'))
-    .join(':');
-
 /** A drawing that stands in a body for itself, not one in a table or a field. */
 const ownDrawing = ':scope > svg.drawing, :scope > * > svg.drawing';
 
 /** How far a slow run has come is said again after so long, ms: each word of it costs the page a frame. */
 const SAY_EVERY_MS = 250;
+
+/** What a cell says while an entry it depends on is refused. */
+const refusedWords = 'held at the last valid study, because an entry it depends on is refused';
 
 /** What a slow run says of itself: 'being worked out: 120 of 480, sizing spans'. */
 const progressWords = (progress: Progress | undefined): string =>
@@ -111,7 +119,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   const notes =
     spec.notes === undefined ? null : h('aside', { class: 'notes', 'aria-label': `Notes to ${station}` });
   const failure = h('div', { class: 'said', role: 'status' });
-  const status = h('p', { class: 'status-words', role: 'status' });
+  const status = h('p', { class: 'status-words', role: 'status', id: `${station}-status` });
   const element = h(
     'div',
     {
@@ -145,6 +153,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   /** Room it is drawn for instead of that on the screen. */
   let given: Room | null = null;
   const stops: (() => void)[] = [];
+  let hold: Hold | undefined;
 
   /** What failed: its own values, or something they are made from by and by. */
   const failedState = () => [state, ...awaited.values()].find((one) => one.state === 'failed');
@@ -160,7 +169,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       return home === station ? 'failed' : 'held';
     }
     if (isBehind() && (!isNear || late.isLate())) return 'pending';
-    return isWaiting() && late.isLate() ? 'pending' : 'done';
+    if (isWaiting() && late.isLate()) return 'pending';
+    return hold?.isHeld() === true ? 'held' : 'done';
   };
 
   const drawPart = (target: HTMLElement, part: Part<U>, values: Values<U>, room: Room): boolean => {
@@ -206,7 +216,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   };
   const heldWords = (): string => {
     const raisedBy = failedState()?.raisedBy;
-    const failed = raisedBy === undefined ? undefined : page.homeOf(raisedBy);
+    if (raisedBy === undefined) return refusedWords;
+    const failed = page.homeOf(raisedBy);
     return `held at the last good figures${failed === undefined ? '' : `, because ${failed} has failed`}`;
   };
 
@@ -247,6 +258,10 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       element.classList.toggle('held', now === 'held');
       element.classList.toggle('failed', now === 'failed');
       element.setAttribute('aria-busy', String(now === 'pending'));
+      // A refusal holds many cells at once and is told where it is made: each says so to those who come to it.
+      status.setAttribute('aria-live', now === 'held' ? 'off' : 'polite');
+      if (now === 'held') element.setAttribute('aria-describedby', status.id);
+      else element.removeAttribute('aria-describedby');
     }
     // Telling the lines costs the page a layout.
     if (!isSame || isResized) page.changed();
@@ -280,6 +295,8 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
       notes?.append(...h('div', {}, standing(spec.notes)).childNodes);
       stops.push(graph.view(spec.shows, show));
       const awaits = spec.awaits ?? [];
+      hold = page.followHold([...Object.values(spec.shows), ...awaits], spec.typed ?? [], updateSoon);
+      stops.push(hold.end);
       for (const cell of [...Object.values(spec.shows), ...awaits]) {
         if (cell.kind !== 'slow') continue;
         const watch = (one: State<unknown>): void => {

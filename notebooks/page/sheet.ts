@@ -3,7 +3,9 @@ import type { HtmlChild } from '../html.ts';
 import type { Cell, Graph, State, Uses, Values } from '../reactive/index.ts';
 import type { CellHost, CellSpec, Explained, Room } from './cellHost.ts';
 import { cellHost } from './cellHost.ts';
+import { clock } from './clock.ts';
 import { exchange } from './exchange.ts';
+import { followHold, neverHeld } from './holding.ts';
 import { frames, screenFrames } from './frames.ts';
 import { heights, type Heights } from './heights.ts';
 import { lateness } from './lateness.ts';
@@ -52,6 +54,8 @@ export interface SheetOptions {
   readonly explain?: (error: unknown, station: string) => Explained;
   /** Slow cells for which only those wait that show them: the others draw what has come before. */
   readonly aside?: readonly Cell<unknown>[];
+  /** Names of the inputs that keep an older value, because what was typed over it is refused. */
+  readonly held?: Cell<readonly string[]>;
 }
 
 /** The page of a notebook: builders for its parts, all tied to one graph. */
@@ -145,7 +149,7 @@ const head = ({ title, answer, next, block }: HeadSpec): HTMLElement =>
  * A page on which cells of a graph are shown. Build cells and sections in page order, then mount them once.
  * Sections get the ids 's1', 's2' ..., cells the id of their station.
  */
-export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOptions = {}): Sheet {
+export function sheet(graph: Graph, { explain = messageOf, aside = [], held }: SheetOptions = {}): Sheet {
   const queue = frames(screenFrames.drawing);
   const element = h('main', { class: 'sheet' });
   const stops: (() => void)[] = [];
@@ -172,6 +176,8 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
     explain,
     rests,
     sight,
+    followHold: (cells: readonly Cell<unknown>[], typed: readonly Cell<unknown>[], tell: () => void) =>
+      held === undefined ? neverHeld : followHold(graph, held, cells, typed, tell),
     drawnUnseen: (cell: HTMLElement) => sizes?.changed(cell.closest<HTMLElement>('.section')!),
     homeOf: (cellName: string) => homeOf(cellName, known, (cell) => graph.uses(cell)),
     waitsFor(station: string) {
@@ -212,6 +218,7 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
       const part = h('span', { class: 'live' }, meanwhile);
       let state: State<Values<typeof uses>> = { state: 'pending' };
       let shown: unknown;
+      let drawnAt: Date | undefined;
       /** Whether it is on the screen or about to be: elsewhere it rests like a drawing. */
       let isNear = true;
       const update = (): void => (isNear ? draw() : rests.put(draw, Infinity));
@@ -219,11 +226,26 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
       const late = lateness(updateSoon);
       const draw = (): void => {
         rests.drop(draw);
-        part.classList.toggle('pending', state.state === 'failed' || late.isLate());
         if (state.state === 'failed' && shown === undefined) part.replaceChildren();
-        if (!('value' in state) || state.value === shown) return;
-        shown = exchange(part, h('span', {}, show(state.value))) ? state.value : undefined;
+        if ('value' in state && state.value !== shown) {
+          shown = exchange(part, h('span', {}, show(state.value))) ? state.value : undefined;
+          drawnAt = new Date();
+        }
+        mark();
       };
+      /** Marks what is older than the page round it, and says so. */
+      const mark = (): void => {
+        const isHeld = state.state === 'ready' && hold.isHeld();
+        part.classList.toggle('pending', state.state === 'failed' || late.isLate());
+        part.classList.toggle('held', isHeld);
+        part.setAttribute('aria-busy', String(late.isLate()));
+        delete part.dataset['older'];
+        // Until its first values come it says something of its own.
+        if (drawnAt === undefined) return;
+        if (isHeld) part.dataset['older'] = 'held';
+        else if (late.isLate()) part.dataset['older'] = `being worked out; as of ${clock(drawnAt)}`;
+      };
+      const hold = page.followHold(Object.values(uses), [], updateSoon);
       part.addEventListener('focusout', updateSoon);
       runs.push(draw);
       stops.push(
@@ -238,6 +260,7 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [] }: SheetOp
         }),
         () => rests.drop(draw),
         late.end,
+        hold.end,
       );
       return part;
     },

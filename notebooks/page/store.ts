@@ -36,6 +36,8 @@ export interface StudyStore {
   /** What is wrong with the draft; while there is anything, the slices keep the last valid study. */
   readonly problems: Input<readonly Problem[]>;
   readonly history: Input<History>;
+  /** Names of the slices that keep an older value than was typed; none while the draft is valid. */
+  readonly held: Input<readonly string[]>;
   /** Changes the draft by a pure function; a change that says the same is none. */
   readonly edit: (change: (study: Study) => Study, words?: EditWords) => void;
   /** Ends the step under way, e.g. on release of a drag; a step that came back to its start is forgotten. */
@@ -71,7 +73,7 @@ const headOf = ({ format, version, title, reference, notice }: Study): Head => (
 /**
  * The study of a page, kept in a graph: the draft, the last valid study in slices, what is wrong, and a history of
  * everything. Its inputs are named 'head', 'brief', 'books', 'options', 'priorities', 'notes', 'decision', 'draft',
- * 'problems' and 'history', and are defined here, so it comes before the cells of the page.
+ * 'problems', 'held' and 'history', and are defined here, so it comes before the cells of the page.
  * @param check what is wrong with a study that follows on the last valid one, itself where it is opened; nothing when it is valid
  * @param mayChange whether the study may be changed here; while it may not, edits, undo and redo do nothing
  * @throws when the study it starts with is not valid
@@ -95,6 +97,7 @@ export function studyStore(
   let draft = study;
   let head = headOf(study);
   let problems: readonly Problem[] = [];
+  let held: readonly string[] = [];
   let done: Step[] = [];
   let undone: Step[] = [];
   let isOpen = false;
@@ -111,7 +114,16 @@ export function studyStore(
   const inputs = {
     draft: graph.input('draft', draft),
     problems: graph.input('problems', problems),
+    held: graph.input('held', held),
     history: graph.input<History>('history', { undo: null, redo: null }),
+  };
+
+  /** The slices in which the draft says something else than the last valid study. */
+  const heldNow = (): string[] => {
+    if (problems.length === 0) return [];
+    const names = ['brief', 'books', 'options', 'priorities', 'notes', 'decision'] as const;
+    const parts = names.filter((name) => draft[name] !== valid[name]);
+    return share(head, headOf(draft)) === head ? parts : ['head', ...parts];
   };
 
   const tell = (): void => {
@@ -131,6 +143,8 @@ export function studyStore(
       }
       graph.set(inputs.draft, draft);
       graph.set(inputs.problems, problems);
+      held = share(held, heldNow());
+      graph.set(inputs.held, held);
       const { history } = inputs;
       const told = graph.state(history);
       const same = told.state === 'ready' && told.value.undo === undo && told.value.redo === redo;

@@ -219,6 +219,51 @@ describe('the deck', () => {
   });
 });
 
+describe('an entry', () => {
+  const stateOf = (station: string): Promise<string | null> =>
+    page.locator(`[id="${station}"]`).getAttribute('data-state');
+  const older = (within: string): Promise<string | null> =>
+    page.locator(`${within} .live:not(:empty)`).last().getAttribute('data-older');
+  /** Pieces of the station line that are dotted. */
+  const dotted = (): Promise<number> => page.locator('svg.stations path[stroke-dasharray="1.4 3.2"]').count();
+
+  it('that is refused holds what hangs on it, in marks and in words, and nothing else, until it is mended', async () => {
+    const asTyped = ['1+010', '1+030', '1+040', '2+020', '10+030'];
+    const all = await page.locator('.cell').evaluateAll((cells) => cells.map(({ id }) => id));
+    expect(await dotted()).toBe(0);
+    await type(page, 'obstacle 2, to, m', '1300');
+    await expect.poll(() => stateOf('10+020')).toBe('held');
+    for (const station of all)
+      expect([station, await stateOf(station)]).toEqual([
+        station,
+        asTyped.includes(station) ? 'done' : 'held',
+      ]);
+    // The line is dotted down to each of them.
+    await expect.poll(dotted).toBeGreaterThanOrEqual(all.length - asTyped.length);
+    const described = await page.locator('[id="3+020"]').getAttribute('aria-describedby');
+    expect(await page.locator(`[id="${described}"]`).textContent()).toBe(
+      'held at the last valid study, because an entry it depends on is refused',
+    );
+    expect(await page.locator(`[id="${described}"]`).getAttribute('aria-live')).toBe('off');
+    await page.evaluate(() => scrollTo(0, 0));
+    await expect.poll(() => older('.answer')).toBe('held');
+    await type(page, 'obstacle 2, to, m', '1385');
+    await settled(page);
+    expect(await dotted()).toBe(0);
+    expect(await page.locator('[id="3+020"]').getAttribute('aria-describedby')).toBeNull();
+    await expect.poll(() => older('.answer')).toBeNull();
+  });
+
+  it('that is taken marks the answer above as older until that of the new site has come', async () => {
+    await page.evaluate(() => scrollTo(0, 0));
+    await type(page, 'end, m', '1480');
+    await page.evaluate(() => scrollTo(0, 0));
+    await expect.poll(() => older('.answer'), { interval: 30 }).toMatch(/^being worked out; as of \d\d:/u);
+    await settled(page);
+    await expect.poll(() => older('.answer')).toBeNull();
+  });
+});
+
 describe('the ground', () => {
   it('says what the odds leave open, keeps the last valid study, and gives the rest where asked', async () => {
     await type(page, 'stretch 1, class 1, odds, %', '40');

@@ -48,6 +48,21 @@ describe('studyStore', () => {
     expect(value(store.slices.brief).obstacles).toBe(obstacles);
   });
 
+  it('names the slices that keep an older value while what is typed is refused, and none once it is not', () => {
+    const { store, value, endTo } = opened();
+    expect(value(store.held)).toEqual([]);
+    endTo(1100);
+    expect(value(store.held)).toEqual(['brief']);
+    // Good in itself, but kept back with what is refused.
+    store.edit((study) => putAt(study, ['books', 'seed'], 7));
+    store.edit((study) => putAt(study, ['title'], 'Another title'));
+    expect(value(store.held)).toEqual(['head', 'brief', 'books']);
+    endTo(1475);
+    expect(value(store.held)).toEqual([]);
+    store.undo();
+    expect(value(store.held)).toEqual(['brief']);
+  });
+
   it('dropStep() takes back the step under way as if it had never been begun, and nothing else', () => {
     const { store, value, endTo, endM } = opened();
     const start = endM();
