@@ -1,13 +1,7 @@
 import { limitsOn, factsIn } from './limitsOn.ts';
 import { wholeCondition } from './verdictOf.ts';
 import type { Condition, Fact, Rule, Source } from './rule.ts';
-
-const placeholder = /\{(?:limit:)?([A-Za-z0-9]+)\}/g;
-
-/** Ids named between braces in a reason template. */
-export function namedIn(template: string): readonly string[] {
-  return [...template.matchAll(placeholder)].map((match) => match[1]!);
-}
+import { countedIn, namedIn } from './template.ts';
 
 function comparisonsOf(
   condition: Condition,
@@ -69,6 +63,10 @@ function faultOf(
   const named = [...namedIn(rule.reason), ...namedIn(rule.otherwise?.reason ?? '')];
   const strangerInReason = named.find((id) => !facts.has(id));
   if (strangerInReason !== undefined) return `unknown fact ${strangerInReason} in the reason`;
+  const uncounted = countedIn(`${rule.reason}${rule.otherwise?.reason ?? ''}`).find(
+    (id) => facts.get(id)?.kind !== 'number',
+  );
+  if (uncounted !== undefined) return `${uncounted} is counted in the reason and is not a number`;
   const strangerInExample = rule.examples
     .flatMap(({ given }) => Object.keys(given))
     .find((id) => !facts.has(id));

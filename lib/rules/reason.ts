@@ -2,8 +2,7 @@ import type { Facts, FactValue } from '../model/index.ts';
 import { fact as factById, source } from './book.ts';
 import { factValue, type Evaluated } from './evaluate.ts';
 import type { Fact } from './rule.ts';
-
-const placeholder = /\{(limit:)?([A-Za-z0-9]+)\}/g;
+import { placeholder } from './template.ts';
 
 /** Decimal places of a step: 0.01 -> 2. */
 const placesOf = (step: number): number => Math.max(0, Math.ceil(-Math.log10(step) - 1e-9));
@@ -52,14 +51,16 @@ function printedLimits(node: Evaluated, entry: Fact): readonly string[] {
 
 /**
  * Fills a reason template: `{fact}` becomes the fact's value with its unit, `{limit:fact}` the limit the evaluated
- * condition held it against.
+ * condition held it against, `{fact?one|more}` the word for one or that for any other number.
  */
 export function reasonOf(template: string, node: Evaluated, facts: Facts): string {
-  return template.replace(placeholder, (_whole, limit: string | undefined, id: string) => {
+  type Words = string | undefined;
+  return template.replace(placeholder, (_whole, limit: Words, id: string, one: Words, more: Words) => {
     const entry = factById(id);
-    return limit === undefined
-      ? printed(entry, factValue(facts, id))
-      : printedLimits(node, entry).join(' or ');
+    if (limit !== undefined) return printedLimits(node, entry).join(' or ');
+    const value = factValue(facts, id);
+    if (one !== undefined && more !== undefined) return value === 1 ? one : more;
+    return printed(entry, value);
   });
 }
 

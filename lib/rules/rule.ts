@@ -91,7 +91,7 @@ export const ruleSchema = z.strictObject({
   when: conditionSchema.optional(),
   condition: conditionSchema,
   effect: effectSchema,
-  /** `{fact}` prints a fact with its unit, `{limit:fact}` the limit it was held against. */
+  /** `{fact}` prints a fact with its unit, `{limit:fact}` the limit it was held against, `{fact?one|more}` a word by its count. */
   reason: z.string().min(1),
   /** What is said where `when` holds and the condition does not; left out = nothing. */
   otherwise: z.strictObject({ effect: effectSchema, reason: z.string().min(1) }).optional(),

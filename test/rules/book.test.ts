@@ -110,6 +110,8 @@ describe('checkBook(rules, facts, sources)', () => {
     ['an unknown fact', { condition: { fact: 'spam', is: '>', value: 1 } }, /unknown fact spam/],
     ['an unknown fact in when', { when: { fact: 'spam', is: '>', value: 1 } }, /unknown fact spam/],
     ['an unknown fact in the reason', { reason: '{spam}' }, /unknown fact spam/],
+    ['an unknown fact counted in the reason', { reason: '{spam?span|spans}' }, /unknown fact spam/],
+    ['a text counted in the reason', { reason: '{method?way|ways}' }, /method is counted in the reason/],
     [
       'an unknown fact in an example',
       { examples: [{ given: { spam: 1 }, expect: 'applies' }] },

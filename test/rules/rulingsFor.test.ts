@@ -66,6 +66,17 @@ describe('rulingsFor(askedOf, form, facts)', () => {
     expect(by(at(0.03, 'continuous'), 'composite-i-optional-depth-continuous')?.because[0]).toContain('1/31');
   });
 
+  it('[R8] words that follow a count are those for one or for more', () => {
+    const said = (fact: 'supportsBarred' | 'supportsSoft', count: number): string | undefined => {
+      const id = fact === 'supportsBarred' ? 'support-barred' : 'support-soft';
+      return by(rulingsFor('option', 'composite-i', { ...site, [fact]: count }), id)?.because[0];
+    };
+    expect(said('supportsBarred', 1)).toBe('1 of its supports stands where the brief allows none');
+    expect(said('supportsBarred', 3)).toBe('3 of its supports stand where the brief allows none');
+    expect(said('supportsSoft', 1)).toMatch(/^1 of its supports stands where/u);
+    expect(said('supportsSoft', 2)).toMatch(/^2 of its supports stand where/u);
+  });
+
   it('[R8] names the limit that decided, not every limit of the condition', () => {
     const side = (sideSpanRatio: number) =>
       by(rulingsFor('arrangement', 'cable-stayed', { pylons: 2, sideSpanRatio }), 'cable-stayed-side-span')
