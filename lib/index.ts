@@ -17,7 +17,7 @@ export {
 export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
 export { choiceProblems } from './appraise/choiceProblems.ts';
 export { depthMissed } from './appraise/depthMissed.ts';
-export { depthTrials } from './appraise/depthTrials.ts';
+export { depthBandOf, depthTrials } from './appraise/depthTrials.ts';
 export { formFacts } from './appraise/facts.ts';
 export { PIER_HALF_WIDTH_M } from './appraise/requestFor.ts';
 export { ruledOut } from './appraise/ruledOut.ts';

@@ -10,6 +10,14 @@ const EACH_SIDE = 4;
 /** From one of them to the next. */
 const STRIDE = 1.09;
 
+/** The band inside which the depth of the main unit of an option is tried, m: published, and never under what can be made. */
+export function depthBandOf(
+  study: Study,
+  { form, method, units, variant = {} }: Pick<AppraisedOption, 'form' | 'method' | 'units' | 'variant'>,
+): readonly [least: number, most: number] {
+  return depthRange(form, method, spansOf(mainUnit(units)), survey(study.brief), variant);
+}
+
 /**
  * An option at its own depth of the main unit, m, and at depths about it inside the published band, rising: worked out,
  * they show what depth does to the cost of the whole crossing. Never fewer than the option itself.
@@ -18,7 +26,7 @@ export function depthTrials(study: Study, worked: AppraisedOption): readonly Mad
   const { number, form, method, units, designs, variant = {} } = worked;
   const main = mainUnit(units);
   const ownM = designs[units.indexOf(main)]!.task.depthM;
-  const [least, most] = depthRange(form, method, spansOf(main), survey(study.brief), variant);
+  const [least, most] = depthBandOf(study, worked);
   const depths = new Set([ownM]);
   for (let k = -EACH_SIDE; k <= EACH_SIDE; k++) {
     const depthM = onGrid(ownM * STRIDE ** k);

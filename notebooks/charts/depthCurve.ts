@@ -1,5 +1,5 @@
 import { curveMonotoneX, line as lineOf } from 'd3-shape';
-import { level, moneyUnit, significant } from '../format.ts';
+import { fixed, level, money2, moneyUnit } from '../format.ts';
 import { linearAxis } from '../drawing/axis.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
@@ -52,7 +52,29 @@ export function flatStretch(
   return [cross(first, points[low - 1]), cross(last, points[high + 1])];
 }
 
-/** Cost of the crossing against depth, with the stretch within 1 % of the least washed and the limits named. */
+/** Places of a depth as it is drawn: depths that print alike are one. */
+const TOLD_APART = 100;
+
+/**
+ * The points with each depth once, the cheapest of it: beams that come in steps make several depths asked for into one.
+ * Rising by depth.
+ */
+export function oncePerDepth<T extends DepthCurveInput['points'][number]>(
+  points: readonly T[],
+): readonly T[] {
+  const once = new Map<number, T>();
+  for (const point of points) {
+    const depth = Math.round(point.depthM * TOLD_APART);
+    const known = once.get(depth);
+    if (known === undefined || point.cost < known.cost) once.set(depth, point);
+  }
+  return [...once.values()].sort((a, b) => a.depthM - b.depthM);
+}
+
+/** By how much more than the least a cost is, %. */
+const overLeast = (cost: number, least: number): number => 100 * (cost / least - 1);
+
+/** Cost of the crossing over its least, in percent, against depth, with the stretch within 1 % of the least washed and the limits named. */
 export function depthCurve(input: DepthCurveInput): Piece {
   const { form, points, widthPx } = input;
   const ink = formInk(input.paper ?? 'colour', [form], input.prefix ?? 'depth');
@@ -68,8 +90,10 @@ export function depthCurve(input: DepthCurveInput): Piece {
     right,
     6,
   );
-  const money = linearAxis(
-    points.map((point) => point.cost),
+  // Differences between depths are surer than the cost itself, and finer than two figures of it.
+  const least = Math.min(...points.map((point) => point.cost));
+  const over = linearAxis(
+    points.map((point) => overLeast(point.cost, least)),
     bottom - 40,
     top + 4,
     5,
@@ -80,7 +104,7 @@ export function depthCurve(input: DepthCurveInput): Piece {
   const nameFrom = widthPx - textWidth(axisName, letters.drawing);
   const path = lineOf<{ depthM: number; cost: number }>(
     (point) => axis.x(point.depthM),
-    (point) => money.x(point.cost),
+    (point) => over.x(overLeast(point.cost, least)),
   )
     .curve(curveMonotoneX)
     .digits(2);
@@ -117,17 +141,20 @@ export function depthCurve(input: DepthCurveInput): Piece {
         ),
       ),
     el('path', {
-      d: money.ticks.map((tick) => `M${num(left)},${num(money.x(tick))}H${num(right)}`).join(''),
+      d: over.ticks.map((tick) => `M${num(left)},${num(over.x(tick))}H${num(right)}`).join(''),
       stroke: colours.grid,
       'stroke-width': pens.fine,
     }),
-    money.ticks.map((tick) =>
-      label(left - 8, money.x(tick) + 4, String(Number((tick / unit.per).toPrecision(4))), {
+    over.ticks.map((tick) =>
+      label(left - 8, over.x(tick) + 4, String(Number(tick.toPrecision(2))), {
         anchor: 'end',
         fill: colours.second,
       }),
     ),
-    label(0, top - 22, `${unit.label} for the crossing`, { fill: colours.second }),
+    points.length > 0 &&
+      label(0, top - 22, `% over the least, ${money2(least / unit.per)} ${unit.label} for the crossing`, {
+        fill: colours.second,
+      }),
     el('path', {
       d: `M${num(left)},${num(bottom)}H${num(right)}${axis.ticks.map((tick) => `M${num(axis.x(tick))},${num(bottom)}v4`).join('')}`,
       stroke: colours.ink,
@@ -152,7 +179,7 @@ export function depthCurve(input: DepthCurveInput): Piece {
     }),
     last !== undefined &&
       !narrow &&
-      label(axis.x(last.depthM) + 6, money.x(last.cost) + 4, 'whole crossing', {
+      label(axis.x(last.depthM) + 6, over.x(overLeast(last.cost, least)) + 4, 'whole crossing', {
         size: letters.table,
         weight: 600,
       }),
@@ -179,13 +206,13 @@ export function depthCurve(input: DepthCurveInput): Piece {
         {},
         el('circle', {
           cx: axis.x(input.depthM),
-          cy: money.x(now),
+          cy: over.x(overLeast(now, least)),
           r: 5,
           fill: colours.ink,
           stroke: colours.sheet,
           'stroke-width': 1.35,
         }),
-        label(axis.x(input.depthM), money.x(now) - 11, level(input.depthM), {
+        label(axis.x(input.depthM), over.x(overLeast(now, least)) - 11, level(input.depthM), {
           anchor: 'middle',
           size: letters.table,
           weight: 600,
@@ -197,10 +224,15 @@ export function depthCurve(input: DepthCurveInput): Piece {
 
 /** The table behind the curve. */
 export function depthTable(input: DepthCurveInput): Table {
+  const least = Math.min(...input.points.map(({ cost }) => cost));
   const unit = moneyUnit(input.currency, Math.max(0, ...input.points.map((point) => point.cost)));
   return {
     caption: 'Cost of the whole crossing against depth at midspan',
-    head: ['depth, m', unit.label],
-    rows: input.points.map((point) => [level(point.depthM), significant(point.cost / unit.per, 3)]),
+    head: ['depth, m', unit.label, '% over the least'],
+    rows: input.points.map(({ depthM, cost }) => [
+      level(depthM),
+      money2(cost / unit.per),
+      fixed(overLeast(cost, least), 1),
+    ]),
   };
 }

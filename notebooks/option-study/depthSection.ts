@@ -1,9 +1,10 @@
-import { depthCurve, depthTable } from '../charts/depthCurve.ts';
+import { depthBandOf, type Study } from '../../lib/index.ts';
+import { depthCurve, depthTable, oncePerDepth, type DepthCurveInput } from '../charts/depthCurve.ts';
 import { tableBehind } from '../charts/table.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { ladder } from '../drawing/ladder.ts';
 import { fixed, level } from '../format.ts';
-import { h } from '../html.ts';
+import { h, type HtmlChild } from '../html.ts';
 import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import type { AppraisedOption } from '../model.ts';
 import { depthPrice, roadWords } from './roadWords.ts';
@@ -14,7 +15,7 @@ const CURVE_PX = 660;
 
 /** Section 4: what stands between the deciding obstacle and the road. */
 export function depthSection(page: Sheet, cells: StudyCells): LineSection {
-  const { site, brief, books, reference, byDepth } = cells;
+  const { asked, site, brief, books, reference, byDepth } = cells;
   const finding = page.live({ reference }, (v) => {
     const option = v.reference;
     if (!option) return '';
@@ -72,16 +73,19 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
     page.cell({
       station: '4+020',
       title: 'Cost against depth',
-      shows: { reference, byDepth, books },
+      shows: { reference, byDepth, books, asked },
       body: (v, room) => {
         const own = v.reference;
         const worked = v.byDepth.filter(({ number }) => number === own?.number);
-        if (!own || worked.length < 3) {
-          return h('p', { class: 'prose' }, 'The published band leaves no other depth to compare with.');
+        const points = oncePerDepth(
+          worked.map(({ depthM, cost }) => ({ depthM: depthM.midspan, cost: cost.p50 })),
+        );
+        if (!own || points.length < 3) {
+          return h('p', { class: 'prose' }, fewDepths(points, own?.depthM.midspan ?? null));
         }
         const input = {
           form: own.form,
-          points: worked.map(({ depthM, cost }) => ({ depthM: depthM.midspan, cost: cost.p50 })),
+          points,
           depthM: own.depthM.midspan,
           limits: depthLimits(worked),
           currency: v.books.currency,
@@ -90,7 +94,8 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
         };
         return [depthCurve(input), tableBehind(depthTable(input))];
       },
-      notes: () => [
+      notes: (v) => [
+        v.reference && depthChoice(v.asked, v.reference),
         h(
           'p',
           {},
@@ -99,6 +104,31 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
       ],
     }),
   ]);
+}
+
+/** Depths that are too few for a curve, in words. */
+function fewDepths(points: DepthCurveInput['points'], ownM: number | null): string {
+  const steps = 'The published band, and the steps in which some beams come, leave';
+  const own = points.find(({ depthM }) => ownM !== null && level(depthM) === level(ownM));
+  const other = points.find((point) => point !== own);
+  if (own === undefined || other === undefined) return `${steps} no other depth to compare with.`;
+  const share = 100 * (other.cost / own.cost - 1);
+  const dearer = `${fixed(Math.abs(share), 1)} % ${share < 0 ? 'cheaper' : 'dearer'}`;
+  return `${steps} one other depth: ${level(other.depthM)} m beside ${level(own.depthM)} m, with a crossing ${dearer}.`;
+}
+
+/** How the depth of the reference was come to, and where the depths that are tried end. */
+function depthChoice(study: Study, option: AppraisedOption): HtmlChild {
+  const [least, most] = depthBandOf(study, option);
+  const typed = study.options.kept.some(({ number, depthM }) => number === option.number && depthM !== null);
+  const chosen = typed
+    ? 'Its depth is typed.'
+    : 'Its depth is the shallowest found within 1 % of the least cost of the whole crossing, at mean rates, whose checks and clearances hold.';
+  return h(
+    'p',
+    {},
+    `${chosen} Depths are tried no further than the published band for its spans: ${level(least)} to ${level(most)} m.`,
+  );
 }
 
 /** Depths at which something ends: the last at which a check fails, the first that lifts the road or fouls a clearance. */

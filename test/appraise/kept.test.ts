@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { type Appraisal, type FormId, type Unit } from '../../lib/index.ts';
+import { depthBandOf, depthTrials, type Appraisal, type FormId, type Unit } from '../../lib/index.ts';
 import { arrangementFacts } from '../../lib/appraise/facts.ts';
 import { rulingsFor } from '../../lib/rules/index.ts';
 import { survey } from '../../lib/site/index.ts';
@@ -34,6 +34,17 @@ describe('appraise(option kept by hand)', { timeout: 60_000 }, () => {
     // The river begins at 1325; a pier at 1324.5 stands with one leg in it, one at 1323.4 beside it.
     expect(first(withKept([1240, 1290, 1324.5, 1400, 1470])).status).toBe('out');
     expect(first(withKept([1240, 1290, 1323.4, 1400, 1470])).faults.join()).not.toMatch(/barred/u);
+  });
+
+  it('depthTrials(study, option) stays inside the band of its depth and holds its own depth', () => {
+    const option = first(withKept([1240, 1290, 1323.4, 1400, 1470]));
+    const [least, most] = depthBandOf(lowFerry(), option);
+    const depths = depthTrials(lowFerry(), option).map(({ depthM }) => depthM!);
+    expect(depths.length).toBeGreaterThan(3);
+    expect(Math.min(...depths)).toBeGreaterThanOrEqual(least);
+    expect(Math.max(...depths)).toBeLessThanOrEqual(most);
+    expect(depths).toContain(option.depthM.midspan);
+    expect(depths).toEqual([...new Set(depths)].sort((a, b) => a - b));
   });
 
   it('works out spans outside their windows and says which', () => {

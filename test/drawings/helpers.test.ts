@@ -2,7 +2,7 @@ import { options, site } from './fixture.ts';
 import { standOff } from '../../notebooks/charts/standOff.ts';
 import { describe, expect, it } from 'vitest';
 import { dominatedSide, edgeOf, undominated } from '../../notebooks/charts/edge.ts';
-import { depthCurve, flatStretch } from '../../notebooks/charts/depthCurve.ts';
+import { depthCurve, depthTable, flatStretch, oncePerDepth } from '../../notebooks/charts/depthCurve.ts';
 import { groupOdds } from '../../notebooks/charts/costIntervals.ts';
 import { logTicks } from '../../notebooks/charts/logTicks.ts';
 import { readAt } from '../../notebooks/drawing/alongOption.ts';
@@ -285,6 +285,45 @@ describe('figures behind charts', () => {
     for (let i = 1; i < ticks.length; i += 1)
       expect(300 * Math.log10(ticks[i]! / ticks[i - 1]!)).toBeGreaterThanOrEqual(15);
   });
+});
+
+it('oncePerDepth(points) keeps the cheapest of each depth that prints alike, rising', () => {
+  const points = [
+    { depthM: 1.6, cost: 9 },
+    { depthM: 1.2, cost: 8 },
+    { depthM: 1.201, cost: 7 },
+    { depthM: 1.2, cost: 8.5 },
+  ];
+  expect(oncePerDepth(points)).toEqual([
+    { depthM: 1.201, cost: 7 },
+    { depthM: 1.6, cost: 9 },
+  ]);
+});
+
+it('depthCurve({points}) and its table name no cost finer than two figures', () => {
+  for (const spread of [0.002, 0.02, 0.2, 2]) {
+    const points = [2, 2.2, 2.4, 2.6].map((depthM, i) => ({
+      depthM,
+      cost: 6.147e6 * (1 + (spread * i) / 3),
+    }));
+    const input = {
+      form: 'composite-i',
+      points,
+      depthM: 2,
+      limits: [],
+      currency: 'EUR',
+      widthPx: 660,
+    } as const;
+    const text = toText(depthCurve(input));
+    expect(text).toContain('% over the least, 6.1 M€ for the crossing');
+    const ticks = Array.from(text.matchAll(/text-anchor="end"[^>]*>([\d.]+)</gu), ([, tick]) => Number(tick));
+    expect(ticks.length).toBeGreaterThan(2);
+    expect(ticks).toEqual(ticks.map((tick) => Number(tick.toPrecision(2))));
+    expect(new Set(ticks).size).toBe(ticks.length);
+    const { rows } = depthTable(input);
+    expect(rows[0]).toEqual(['2.00', '6.1', '0.0']);
+    expect(rows.at(-1)![2]).toBe((100 * spread).toFixed(1));
+  }
 });
 
 it('depthCurve({points}) of a narrow band of depth names no two ticks alike', () => {
