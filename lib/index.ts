@@ -53,12 +53,14 @@ export {
   waterDepthAt,
 } from './site/index.ts';
 export {
+  asPriceDate,
   fillGround,
   fingerprint,
   groundLabels,
   parseStudy,
   readDraft,
   readStudy,
+  studyVersion,
   writeStudy,
 } from './study/index.ts';
 export { items } from './takeoff/index.ts';

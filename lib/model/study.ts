@@ -221,7 +221,7 @@ export interface Access {
 export interface Budget {
   /** Money of the study's currency. */
   readonly amount: number;
-  /** Price date, e.g. '2026 Q1'. */
+  /** Price date: '2026 Q1', '2026-03' or '2026-03-15', or 'unknown'. */
   readonly priceDate: string;
   readonly includes: string;
 }

@@ -7,12 +7,13 @@ import {
   type Told,
 } from '../model/index.ts';
 import { parseStudy } from './readStudy.ts';
+import { studyVersion } from './schema.ts';
 
 /** A study that says nothing but what it must: what else is in it are presets of the tool. */
 function presets(): Study {
   const read = parseStudy({
     format: 'spanledger-study',
-    version: 1,
+    version: studyVersion,
     title: 'presets',
     brief: {
       crossing: {
@@ -174,7 +175,9 @@ export const studyFigures: readonly Descriptor[] = [
     method: 'typed',
     formula: (at) => {
       const { budget } = at.study.brief;
-      return budget === 'unknown' ? 'not given' : `prices of ${budget.priceDate}; ${budget.includes}`;
+      return budget === 'unknown'
+        ? 'not given'
+        : `prices of ${budget.priceDate === 'unknown' ? 'an unknown date' : budget.priceDate}; ${budget.includes}`;
     },
     sources: ['brief'],
   }),

@@ -13,9 +13,10 @@ import {
   type FormId,
 } from '../model/index.ts';
 import { fillGround } from './fillGround.ts';
+import { asPriceDate, priceDateWords } from './priceDate.ts';
 
 /** Version of the study file written by this tool. */
-export const studyVersion = 1;
+export const studyVersion = 2;
 
 /** Largest chainage or level taken seriously, m: beyond it a figure is a slip of the keyboard. */
 const FAR_M = 1e7;
@@ -140,7 +141,12 @@ const demands = z.strictObject({
   gasMain: z.enum(gasMains).default('none'),
 });
 
-const budget = z.strictObject({ amount: money, priceDate: name, includes: text.default('') });
+const budget = z.strictObject({
+  amount: money,
+  priceDate: orUnknown(name.refine((words) => asPriceDate(words) === words, priceDateWords)),
+  // Room for what version 1 wrote as the price date, which the step to version 2 puts here.
+  includes: z.string().max(21_000).default(''),
+});
 
 const brief = z
   .strictObject({

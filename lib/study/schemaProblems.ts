@@ -56,6 +56,8 @@ function expectation(issue: Issue): string {
       return `${issue.inclusive === true ? 'at least' : 'more than'} ${issue.minimum}${sized(issue.origin)}`;
     case 'too_big':
       return `${issue.inclusive === true ? 'at most' : 'less than'} ${issue.maximum}${sized(issue.origin)}`;
+    case 'custom':
+      return issue.message;
     default:
       return 'a value of the right form';
   }

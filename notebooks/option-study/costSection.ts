@@ -11,7 +11,7 @@ import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
 import { madeFigure } from './madeFigure.ts';
 import type { StudyCells } from './studyCells.ts';
-import { budgetOf } from './words.ts';
+import { budgetOf, priceDateWords } from './words.ts';
 
 const STEEL = 'plate-girder-steel';
 
@@ -109,7 +109,7 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
           ...common(v, room.widthPx, 'intervals'),
           budget: budgetOf(v.brief),
           ...(room.paperPx !== null && { heightPx: room.paperPx }),
-          ...(budget === 'unknown' ? {} : { priceDate: budget.priceDate }),
+          ...(budget === 'unknown' ? {} : { priceDate: priceDateWords(budget.priceDate) }),
         };
         return [costIntervals(input), tableBehind(costTable(input))];
       },

@@ -16,11 +16,15 @@ export function moneyWords(value: number, currency: string): string {
 export const budgetOf = (brief: Brief): number | null =>
   brief.budget === 'unknown' ? null : brief.budget.amount;
 
+/** A price date in words, where none is known that it is not dated. */
+export const priceDateWords = (priceDate: string): string =>
+  priceDate === 'unknown' ? 'undated' : priceDate;
+
 /** '2026 Q1, EUR'. */
 export const pricesWords = (study: Pick<Study, 'brief' | 'books'>): string =>
   study.brief.budget === 'unknown'
     ? study.books.currency
-    : `${study.brief.budget.priceDate}, ${study.books.currency}`;
+    : `${priceDateWords(study.brief.budget.priceDate)}, ${study.books.currency}`;
 
 /** The first option of each form, in order. */
 export function firstOfEachForm(options: readonly AppraisedOption[]): AppraisedOption[] {

@@ -1,4 +1,11 @@
-import { parseStudy, ratesFor, sentence, type StandardId, type Study } from '../../lib/index.ts';
+import {
+  parseStudy,
+  ratesFor,
+  sentence,
+  studyVersion,
+  type StandardId,
+  type Study,
+} from '../../lib/index.ts';
 import { fixed, listed } from '../format.ts';
 import { withClearanceState } from '../option-study/brief/clearanceState.ts';
 import type { Figure } from '../page/index.ts';
@@ -212,7 +219,7 @@ export function begun(gaps: Gaps, titles: readonly string[] = []): Begun {
   const title = gaps.title.trim();
   const parsed = parseStudy({
     format: 'spanledger-study',
-    version: 1,
+    version: studyVersion,
     title: title === '' ? untaken('New crossing', titles) : title,
     brief: {
       crossing: { startM: 0, endM: lengthM, ground },

@@ -8,6 +8,7 @@ import {
   laneCount,
   obstacleWidth,
   planShape,
+  priceDate,
   radiusOfCurve,
 } from '../../notebooks/option-study/brief/madeFields.ts';
 import { hasUltimate, stripForGap, withStripWidth } from '../../notebooks/option-study/brief/stripEdits.ts';
@@ -102,5 +103,21 @@ describe('strips', () => {
     const added = withEntry(study, ['brief', 'deck'], 8, stripForGap(deck, 8));
     expect(added.brief.deck.map(({ kind }) => kind).slice(-2)).toEqual(['parapet', 'parapet']);
     expect(withoutEntry(added, ['brief', 'deck'], 8).brief.deck).toEqual(deck);
+  });
+});
+
+describe('priceDate', () => {
+  const typed = (words: string): unknown => {
+    const { budget } = priceDate.put(workedStudy(), words).brief;
+    return budget === 'unknown' ? budget : budget.priceDate;
+  };
+
+  it('takes a quarter as people write it, a question mark as undated, and leaves other words to be refused', () => {
+    expect(typed('q2 2027')).toBe('2027 Q2');
+    expect(typed('2027-04')).toBe('2027-04');
+    expect([typed('?'), typed('undated')]).toEqual(['unknown', 'unknown']);
+    expect(priceDate.get(priceDate.put(workedStudy(), '?'))).toBe('undated');
+    expect(typed('hello')).toBe('hello');
+    expect(placesOf(priceDate.put(workedStudy(), 'hello'))).toEqual(['brief.budget.priceDate']);
   });
 });

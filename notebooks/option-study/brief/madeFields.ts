@@ -1,6 +1,7 @@
-import type { Budget, Crossing, Study } from '../../../lib/index.ts';
+import { asPriceDate, type Budget, type Crossing, type Study } from '../../../lib/index.ts';
 import type { Figure, Made } from '../../page/index.ts';
 import { putAt } from '../../page/place.ts';
+import { priceDateWords } from '../words.ts';
 
 /** How the road lies in plan. */
 export type PlanShape = 'straight' | 'curve' | 'unknown';
@@ -104,6 +105,20 @@ export function budgetAmount(firstPriceDate: string): Made<Figure> {
     owns: [['brief', 'budget', 'amount']],
   };
 }
+
+const priceDatePath = ['brief', 'budget', 'priceDate'];
+
+/** The price date of a budget in words: a date that can be told is written as the study writes it, '?' is undated. */
+export const priceDate: Made<string> = {
+  key: priceDatePath.join('.'),
+  has: ({ brief }) => brief.budget !== 'unknown',
+  get: ({ brief: { budget } }) => (budget === 'unknown' ? '' : priceDateWords(budget.priceDate)),
+  put(study, words) {
+    const isUnknown = ['?', 'unknown', priceDateWords('unknown')].includes(words);
+    return putAt(study, priceDatePath, isUnknown ? 'unknown' : (asPriceDate(words) ?? words));
+  },
+  owns: [priceDatePath],
+};
 
 /** Whether the ground is proved all along: of all its stretches, of none, or of some. */
 export type Proved = 'known' | 'unknown' | 'part';

@@ -3,7 +3,7 @@ import type { HtmlChild } from '../../html.ts';
 import { putAt, type Figure, type Made, type Path } from '../../page/index.ts';
 import { fromYesNo, gasMainChoices, lanesKeptChoices, yesNoOf, type YesNo } from './briefChoices.ts';
 import type { InWords } from './inWords.ts';
-import { groundProved, provedOf } from './madeFields.ts';
+import { groundProved, priceDate, provedOf } from './madeFields.ts';
 
 /** Whether the ground is proved. */
 export function groundSentence({ fields }: InWords, study: Study): HtmlChild {
@@ -122,9 +122,9 @@ export function budgetSentence(
     }),
     isKnown && [
       ` million ${books.currency} at `,
-      fields.words(['brief', 'budget', 'priceDate'], { label: 'price date', most: 500 }),
+      fields.words(priceDate, { label: 'price date', most: 500 }),
       ' prices, for: ',
-      fields.words(['brief', 'budget', 'includes'], { label: 'what the budget includes', most: 20_000 }),
+      fields.words(['brief', 'budget', 'includes'], { label: 'what the budget includes', most: 21_000 }),
     ],
     '. ',
   ];
