@@ -1,10 +1,10 @@
 import type { Problem } from '../model/index.ts';
-import { sentences } from '../messages/index.ts';
+import { fileSentence } from '../messages/index.ts';
 
 /** Bad input: why a command did nothing. */
 export class Refusal extends Error {
   constructor(readonly problems: readonly Problem[]) {
-    super(sentences(problems).join('\n'));
+    super(problems.map(fileSentence).join('\n'));
     this.name = 'Refusal';
   }
 }

@@ -1,2 +1,2 @@
 export { inText } from './inText.ts';
-export { placeOf, remedyFor, sentence, sentences } from './messages.ts';
+export { fileSentence, placeOf, remedyFor, sentence, sentences } from './messages.ts';

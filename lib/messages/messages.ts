@@ -1,4 +1,5 @@
 import type { Problem, ProblemCode } from '../model/index.ts';
+import { placeWords } from './placeWords.ts';
 
 /** What to do about a problem, where its maker has nothing more exact to say. */
 const remedies: Readonly<Record<ProblemCode, string>> = {
@@ -31,29 +32,22 @@ export function placeOf(path: readonly (string | number)[]): string {
   );
 }
 
-const unitSuffix = /(?<=[a-z])(M|T|Deg|KNm|KN|KNM2|Kg|KgM3|M2|M3|MPa)$/u;
-
-/** Trade word for the field a problem is about: `headroomM` becomes 'headroom', `toM` of a zone stays 'to'. */
-function subjectOf(path: readonly (string | number)[]): string {
-  const last = path.at(-1);
-  if (last === undefined) return 'study';
-  if (typeof last === 'number') return `${subjectOf(path.slice(0, -1))}, entry ${last + 1}`;
-  return last
-    .replace(unitSuffix, '')
-    .replace(/^--/u, '')
-    .replace(/(?<=[a-z0-9])[A-Z]/gu, (capital) => ` ${capital.toLowerCase()}`);
-}
-
 /**
- * One problem as a sentence: 'headroom: expected more than 0 m, received -3 m (brief.obstacles[1].clearance.headroomM).
+ * One problem as a sentence, its place in words: 'obstacle 2, clearance, headroom: expected more than 0 m, received -3 m.
  * Enter a larger value.'
  */
-export function sentence(problem: Problem): string {
-  const unit = problem.unit === undefined ? '' : ` ${problem.unit}`;
+export const sentence = (problem: Problem): string => said(problem, '');
+
+/** The same for those who have the file before them: its place in the file stands behind it. */
+export function fileSentence(problem: Problem): string {
   const place = placeOf(problem.path);
-  const where = place === '' ? '' : ` (${place})`;
-  const remedy = problem.remedy === '' ? remedyFor(problem.code) : problem.remedy;
-  return `${subjectOf(problem.path)}: expected ${problem.expected}${unit}, received ${problem.received}${unit}${where}. ${remedy}.`;
+  return said(problem, place === '' ? '' : ` (${place})`);
+}
+
+function said({ code, path, expected, received, unit, remedy }: Problem, where: string): string {
+  const inUnit = unit === undefined ? '' : ` ${unit}`;
+  const asked = `expected ${expected}${inUnit}, received ${received}${inUnit}`;
+  return `${placeWords(path)}: ${asked}${where}. ${remedy === '' ? remedyFor(code) : remedy}.`;
 }
 
 /** All problems as sentences, in order. */

@@ -7,12 +7,11 @@ const ODDS_TOLERANCE = 1e-6;
 /** Longest crossing the search is made for, m. */
 const LONGEST_M = 20_000;
 
-function rising(path: Path, from: string, to: string, fromM: number, toM: number): Problem[] {
+/** The end of a stretch, which stands at `path`, lies beyond its start. */
+function rising(path: Path, fromM: number, toM: number): Problem[] {
   if (fromM < toM) return [];
-  const remedy = `Exchange '${from}' and '${to}' or correct one of them`;
-  return [
-    problem('reversed', [...path, to], `more than '${from}' at ${fromM}`, `${toM}`, { unit: 'm', remedy }),
-  ];
+  const remedy = 'Exchange the start and the end or correct one of them';
+  return [problem('reversed', path, `more than the start at ${fromM}`, `${toM}`, { unit: 'm', remedy })];
 }
 
 /** The windows of the abutments lie inside the crossing and leave room between them. */
@@ -47,7 +46,7 @@ function windowProblems({
 function crossingProblems({ crossing }: Brief): Problem[] {
   const { startM, endM, ground } = crossing;
   const path = ['brief', 'crossing'];
-  const found = rising(path, 'startM', 'endM', startM, endM);
+  const found = rising([...path, 'endM'], startM, endM);
   if (found.length > 0) return found;
   if (endM - startM > LONGEST_M) {
     found.push(
@@ -102,9 +101,9 @@ function obstacleProblems({ crossing, obstacles }: Brief): Problem[] {
   return obstacles.flatMap((obstacle, i) => {
     const path = ['brief', 'obstacles', i];
     const { fromM, toM, clearance } = obstacle;
-    const found = rising(path, 'fromM', 'toM', fromM, toM);
+    const found = rising([...path, 'toM'], fromM, toM);
     if (clearance !== null) {
-      found.push(...rising([...path, 'clearance'], 'fromM', 'toM', clearance.fromM, clearance.toM));
+      found.push(...rising([...path, 'clearance', 'toM'], clearance.fromM, clearance.toM));
     }
     if (obstacle.supports !== 'hard') return found;
     for (const abutmentM of [crossing.startM, crossing.endM]) {
@@ -130,8 +129,8 @@ function waterProblems({ waters }: Brief): Problem[] {
   return waters.flatMap((water, i) => {
     const path = ['brief', 'waters', i];
     const found = [
-      ...rising(path, 'fromM', 'toM', water.fromM, water.toM),
-      ...rising(path, 'floodFromM', 'floodToM', water.floodFromM, water.floodToM),
+      ...rising([...path, 'toM'], water.fromM, water.toM),
+      ...rising([...path, 'floodToM'], water.floodFromM, water.floodToM),
     ];
     const { floodLevelM, levelM } = water;
     if (floodLevelM !== 'unknown' && !(floodLevelM >= levelM)) {
@@ -146,7 +145,7 @@ function groundProblems({ crossing, groundStretches }: Brief): Problem[] {
   const path = ['brief', 'groundStretches'];
   const found: Problem[] = [];
   groundStretches.forEach((stretch, i) => {
-    found.push(...rising([...path, i], 'fromM', 'toM', stretch.fromM, stretch.toM));
+    found.push(...rising([...path, i, 'toM'], stretch.fromM, stretch.toM));
     const sum = stretch.classes.reduce((total, { odds }) => total + odds, 0);
     if (!(Math.abs(sum - 1) <= ODDS_TOLERANCE)) {
       found.push(

@@ -3,7 +3,7 @@ import { needFlags, readFlags } from '../../lib/cli/flags.ts';
 import { numberFlag } from '../../lib/cli/numberFlag.ts';
 import { Refusal } from '../../lib/cli/refusal.ts';
 import type { Problem } from '../../lib/model/index.ts';
-import { sentences } from '../../lib/messages/index.ts';
+import { fileSentence } from '../../lib/messages/index.ts';
 
 /** Values of two number flags, the first of which is needed, and the problems there are. */
 function read(line: string): { values: (number | undefined)[]; problems: Problem[] } {
@@ -42,7 +42,7 @@ describe('flags of the command line', () => {
     expect(read(line).problems.map((problem) => problem.code)).toEqual([code]);
   });
   it('name subject, expected, received, place and remedy', () => {
-    expect(sentences(read('--span -3').problems)).toEqual([
+    expect(read('--span -3').problems.map(fileSentence)).toEqual([
       'span: expected a number above 0, at most 3000 m, received -3 m (--span). give --span as a number in m.',
     ]);
   });
