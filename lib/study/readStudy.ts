@@ -59,11 +59,33 @@ function withEntry<T>(root: T, path: readonly (string | number)[], value: unknow
 }
 
 /**
- * Text of a study as it was typed, which need not be valid: its shape is that of a study, single entries may lie outside
- * what is allowed and several may contradict each other. `valid` is the study it was typed over: its entries hold the
- * places of refused ones while the shape is read. Null where the shape cannot be read. Never throws.
+ * Entries that hold the place of a refused one while a shape is read: between them every entry of a study takes one,
+ * wherever figures, counts and words may lie.
  */
-export function readDraft(text: string, valid: Study): Study | null {
+const standIns: readonly (number | string)[] = [1, 0.1, 'unknown', 2, 100];
+
+/** Plain data in which some entry that is allowed stands at `path`; unchanged where none of those at hand is. */
+function withStandIn(
+  root: Readonly<Record<string, unknown>>,
+  path: readonly (string | number)[],
+): Readonly<Record<string, unknown>> {
+  const place = path.join('.');
+  const isRefused = (study: unknown): boolean => {
+    const parsed = studySchema.safeParse(study);
+    return (
+      !parsed.success &&
+      schemaProblems(parsed.error.issues, study).some((one) => one.path.join('.') === place)
+    );
+  };
+  const shapes = standIns.map((entry) => withEntry(root, path, entry));
+  return shapes.find((shape) => !isRefused(shape)) ?? root;
+}
+
+/**
+ * Text of a study as it was typed, which need not be valid: its shape is that of a study, single entries may lie outside
+ * what is allowed and several may contradict each other. Null where the shape cannot be read. Never throws.
+ */
+export function readDraft(text: string): Study | null {
   const json = safeJson(text);
   if (!json.ok || typeof json.value !== 'object' || json.value === null) return null;
   const raw = json.value as Record<string, unknown>;
@@ -74,10 +96,9 @@ export function readDraft(text: string, valid: Study): Study | null {
   const faults = schemaProblems(parsed.error.issues, current).map(({ path }) => ({
     path,
     typed: valueAt(current, path),
-    good: valueAt(valid, path),
   }));
-  if (!faults.every(({ typed, good }) => isEntry(typed) && isEntry(good))) return null;
-  const shape = faults.reduce((study, { path, good }) => withEntry(study, path, good), current);
+  if (!faults.every(({ typed }) => isEntry(typed))) return null;
+  const shape = faults.reduce((study, { path }) => withStandIn(study, path), current);
   const read = studySchema.safeParse(shape);
   if (!read.success) return null;
   return faults.reduce<Study>((study, { path, typed }) => withEntry(study, path, typed), read.data);

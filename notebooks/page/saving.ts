@@ -30,8 +30,8 @@ export interface StudyCupboard {
 /** The way in and the way out of a study file. */
 export interface StudyFormat {
   readonly readStudy: (text: string) => Result<Study>;
-  /** A study as typed over a valid one; null where it cannot be read. */
-  readonly readDraft: (text: string, valid: Study) => Study | null;
+  /** A study as typed, with what is refused in it; null where it cannot be read. */
+  readonly readDraft: (text: string) => Study | null;
   readonly writeStudy: (study: Study) => string;
 }
 
@@ -51,7 +51,7 @@ export function readTyped(
   const read = readStudy(text);
   if (!read.ok) return read;
   const study = read.value;
-  return { ok: true, value: { study, draft: draft === undefined ? null : readDraft(draft, study) } };
+  return { ok: true, value: { study, draft: draft === undefined ? null : readDraft(draft) } };
 }
 
 /** A study as it is to be kept, the way `readTyped` reads it. */

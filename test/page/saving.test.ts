@@ -73,6 +73,36 @@ describe('studyShelf', () => {
     expect(value(await studies.load('a')).draft).toBeNull();
   });
 
+  it('keeps what is refused in a row that the valid study does not have', async () => {
+    const { shelf: studies } = shelf();
+    const { brief, options } = lowFerry();
+    const study: Study = { ...lowFerry(), brief: { ...brief, obstacles: [], waters: [], budget: 'unknown' } };
+    const obstacle = { ...brief.obstacles[0]!, name: '', fromM: 2e7, pierPremium: -5 };
+    const over = { fromM: 1300, toM: 1310, datumLevelM: 20_000, headroomM: 0, confirmed: false };
+    const units = [{ form: 'concrete-box', role: 'main', supportsM: [1240, 1470] }] as const;
+    const kept = {
+      number: 0,
+      form: 'concrete-box',
+      method: 'falsework',
+      units,
+      depthM: -1,
+      variant: { haunchRatio: 9, castInPiers: 0, strengthMPa: 900, ballastKNm: [-3] },
+    } as const;
+    const draft: Study = {
+      ...study,
+      brief: {
+        ...study.brief,
+        obstacles: [{ ...obstacle, clearance: over }],
+        waters: [{ ...brief.waters[0]!, freeboardM: 90, vesselSpeedMs: 0, floodReturnYears: 0 }],
+        budget: { amount: 0, priceDate: 'hello', includes: '' },
+      },
+      options: { ...options, kept: [kept] },
+    };
+    expect(readStudy(writeStudy(draft)).ok).toBe(false);
+    value(await studies.save('a', typed(study, draft), 0));
+    expect(value(await studies.load('a'))).toMatchObject({ study, draft });
+  });
+
   it('a draft that cannot be read is left out, and the valid study stands', async () => {
     const { shelf: studies, kept } = shelf();
     value(await studies.save('a', typed(lowFerry(), { ...lowFerry(), title: 'Typed' }), 0));

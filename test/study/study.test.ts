@@ -8,6 +8,7 @@ import { asPriceDate } from '../../lib/study/priceDate.ts';
 import {
   fingerprint,
   parseStudy,
+  readDraft,
   readStudy,
   studyVersion,
   writeStudy,
@@ -307,6 +308,34 @@ describe('fingerprint', () => {
     const numbered = { ...study, options: { ...study.options, register } } as Study;
     expect(writeStudy(numbered)).not.toBe(writeStudy(study));
     expect(fingerprint(numbered)).toBe(fingerprint(study));
+  });
+});
+
+describe('readDraft', () => {
+  it('readDraft(text) holds any one figure however far out it lies, as it was typed', () => {
+    type Plain = Readonly<Record<string, unknown>>;
+    const study = lowFerry();
+    const figures = (value: unknown, path: readonly string[]): (readonly string[])[] =>
+      typeof value === 'number'
+        ? [path]
+        : typeof value === 'object' && value !== null
+          ? Object.entries(value).flatMap(([key, part]) => figures(part, [...path, key]))
+          : [];
+    const put = (part: unknown, [key, ...rest]: readonly string[], by: number): unknown => {
+      if (key === undefined) return by;
+      const next = put((part as Plain)[key], rest, by);
+      return Array.isArray(part)
+        ? part.map((one: unknown, i) => (String(i) === key ? next : one))
+        : { ...(part as Plain), [key]: next };
+    };
+    const places = figures(study, []).filter(([top]) => top !== 'version');
+    expect(places.length).toBeGreaterThan(80);
+    for (const place of places) {
+      for (const by of [-9e15, 9e15]) {
+        const draft = put(study, place, by) as Study;
+        expect([place, readDraft(writeStudy(draft))]).toEqual([place, draft]);
+      }
+    }
   });
 });
 
