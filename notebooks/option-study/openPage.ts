@@ -46,6 +46,7 @@ import { briefSection } from './briefSection.ts';
 import { costSection } from './costSection.ts';
 import { depthSection } from './depthSection.ts';
 import { heldNote } from './heldNote.ts';
+import { openedNote } from './openedNote.ts';
 import { programmeSection, tradeOffSection } from './programmeSection.ts';
 import { quantitySection } from './quantitySection.ts';
 import { rankingSection } from './rankingSection.ts';
@@ -125,6 +126,8 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
   const page = sheet(graph, { aside: [cells.byDepth, cells.spanning], held: store.held });
 
   const saved = h('span', { class: 'state', role: 'status' }, problem);
+  /** Said of a study that was opened from a file until it is changed. */
+  const fromFile = h('p', { class: 'opened', role: 'status' });
   const button = (words: string, act: () => void): HTMLElement =>
     h('button', { type: 'button', class: 'action', onclick: act }, words);
   /** A study with the numbers that its options have been given meanwhile. */
@@ -154,14 +157,26 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
       saved.textContent = `Not opened, the study on the page is kept. ${read.problems.map(sentence).join(' ')}`;
       return;
     }
+    // Where nothing is kept the study on the page is not lost either: it stands one step of undo away.
+    if (kept === null) {
+      store.edit(() => read.value, { what: `opening ${read.value.title}` });
+      return;
+    }
     // A study from a file is another study: it never takes the place of the one that was on the page.
-    kept?.startAnew(crypto.randomUUID());
+    const earlier = { id: kept.id(), title: store.valid().title };
+    const before = await kept.startAnew(crypto.randomUUID());
+    if (before === 'not saved') {
+      saved.prepend('Not opened, because what was changed on the page is not saved. ');
+      return;
+    }
+    fromFile.replaceChildren(...h('span', {}, openedNote(before === 'kept' ? earlier : null)).childNodes);
     store.open(read.value);
   };
   const undo = button('Undo', store.undo);
   const redo = button('Redo', store.redo);
   graph.watch(store.history, (state) => {
     if (state.state !== 'ready') return;
+    if (state.value.undo !== null) fromFile.replaceChildren();
     for (const [element, word, what] of [
       [undo, 'Undo', state.value.undo],
       [redo, 'Redo', state.value.redo],
@@ -185,6 +200,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
         button('Save as file', saveAsFile),
         button('Print', () => print()),
         button('Print upright', printUpright),
+        fromFile,
       ],
     },
     head: {

@@ -11,8 +11,11 @@ export interface Keeping {
   readonly mayChange: () => boolean;
   /** Something has changed: it is written down at once, or when a drag rests, and saved soon. */
   readonly changed: () => void;
-  /** The page now shows another study, which is not on the device yet. */
-  readonly startAnew: (id: string) => void;
+  /**
+   * Saves what waits and turns to another study, which is not on the device yet; says what has become of the one before.
+   * Where that could not be saved it stays, and nothing is done.
+   */
+  readonly startAnew: (id: string) => Promise<'kept' | 'never changed' | 'not saved'>;
   readonly takeOver: () => void;
 }
 
@@ -138,12 +141,16 @@ export function keeping(spec: KeepingSpec): Keeping {
       clearTimeout(saving);
       saving = setTimeout(() => void save(), SAVE_AFTER_MS);
     },
-    startAnew(next) {
+    async startAnew(next) {
+      write();
+      await save();
+      if (hasChanged()) return 'not saved';
+      const before = revision > 0 ? 'kept' : 'never changed';
       own.end();
       id = next;
       revision = 0;
-      isDirty = false;
       claim();
+      return before;
     },
     takeOver: () => own.takeOver(),
   };

@@ -1,7 +1,8 @@
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import example from '../../data/examples/low-ferry.json' with { type: 'json' };
 import { openSite, type Heard, type Site } from './site.ts';
-import { middleOf } from './studyPage.ts';
+import { middleOf, openAsFile } from './studyPage.ts';
 
 let site: Site;
 let page: Page;
@@ -128,6 +129,30 @@ describe('a study on the device', () => {
     expect(await shown(page, 'no-pier width')).toBe('67.0');
     expect(await bar(page)).not.toContain('Read only');
     expect(heard.console).toEqual([]);
+  });
+});
+
+describe('a study from a file', () => {
+  it('is a study of its own; the one before it is kept as it was left, and the page says where', async () => {
+    const [first, before] = [page.url(), await shown(page, 'no-pier width')];
+    await type(page, 'no-pier width', '71');
+    await openAsFile(page, { ...example, title: 'A file from elsewhere' });
+    const note = page.locator('.opened');
+    await note.getByRole('link', { name: 'River Wend crossing at Low Ferry' }).waitFor();
+    expect(await note.textContent()).toBe(
+      'Opened as a study of its own, with an Undo of its own. River Wend crossing at Low Ferry is kept on the shelf as it was left. ',
+    );
+    expect(await page.locator('h1').textContent()).toBe('A file from elsewhere');
+    expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+    expect(page.url()).not.toBe(first);
+    await type(page, 'no-pier width', '58');
+    expect(await note.textContent()).toBe('');
+    await allSaved(page);
+    await page.goto(first);
+    await briefed(page);
+    expect(await shown(page, 'no-pier width')).toBe('71.0');
+    await type(page, 'no-pier width', before!);
+    await allSaved(page);
   });
 });
 

@@ -126,6 +126,33 @@ describe('keeping', () => {
     expect(where.kept.get('one')).toMatchObject({ text: writeStudy(study), draft: writeStudy(draft) });
   });
 
+  it('startAnew(id) saves what waits before it turns to another study, and says whether the first is kept', async () => {
+    const { locks, give } = locksByHand();
+    const where = device();
+    const { kept } = keep(lowFerry(), locks, where);
+    give();
+    kept.changed();
+    expect(await kept.startAnew('two')).toBe('kept');
+    expect(kept.id()).toBe('two');
+    expect(where.kept.get('one')?.text).toBe(writeStudy(lowFerry()));
+    expect(await kept.startAnew('three')).toBe('never changed');
+    expect([...where.kept.keys()]).toEqual(['one']);
+  });
+
+  it('startAnew(id) stays with a study that cannot be saved', async () => {
+    const { locks, give } = locksByHand();
+    const where = device();
+    const { kept, said } = keep(lowFerry(), locks, where);
+    give();
+    // Saved elsewhere meanwhile.
+    await where.shelf.save('one', { study: { ...lowFerry(), title: 'Elsewhere' }, draft: null }, 0);
+    kept.changed();
+    expect(await kept.startAnew('two')).toBe('not saved');
+    expect(kept.id()).toBe('one');
+    expect(said).toEqual(['mine', 'refused 1']);
+    expect(where.unsaved.get('one')?.text).toBe(writeStudy(lowFerry()));
+  });
+
   it('a saving that ends after another tab has taken the study over says nothing', async () => {
     const { locks, give, take } = locksByHand();
     const where = device();
