@@ -26,6 +26,7 @@ import {
 } from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
 import { copyTitle, keptStudies, type KeptStudy } from './kept.ts';
+import { keptGaps } from './keptGaps.ts';
 import { newSentence } from './newSentence.ts';
 import { smallCrossing } from './smallCrossing.ts';
 import { studyHref, studyList } from './studyList.ts';
@@ -109,10 +110,13 @@ async function start(): Promise<void> {
     said.textContent = `${refusedWith} ${saved.problems.map(sentence).join(' ')}`;
     return null;
   };
-  const keepAndOpen = async (study: Study, refusedWith: string): Promise<void> => {
+  const keepAndOpen = async (study: Study, refusedWith: string, kept?: () => void): Promise<void> => {
     const id = await keep(study, refusedWith);
-    if (id !== null) location.assign(studyHref(id));
+    if (id === null) return;
+    kept?.();
+    location.assign(studyHref(id));
   };
+  const sentenceKept = keptGaps(() => localStorage);
   const open = async (): Promise<void> => {
     const text = await openFile();
     if (text === null || cupboard === null) return;
@@ -161,7 +165,8 @@ async function start(): Promise<void> {
             shows: {},
             body: newSentence({
               titles,
-              begin: shelf && ((study) => void keepAndOpen(study, 'Not begun.')),
+              begin: shelf && ((study) => void keepAndOpen(study, 'Not begun.', sentenceKept.clear)),
+              kept: sentenceKept,
             }),
             notes: [
               h('p', {}, 'Type, use the arrow keys, or leave a gap: a question mark makes it unknown again.'),

@@ -5,7 +5,8 @@ import { listed } from '../format.ts';
 import { h } from '../html.ts';
 import { loadingChoices } from '../option-study/brief/briefChoices.ts';
 import { choiceInput, figureInput, wordsInput, type Figure, type FigureSpec } from '../page/index.ts';
-import { begun, emptyGaps, type Crossed, type Gaps } from './newStudy.ts';
+import type { KeptGaps } from './keptGaps.ts';
+import { begun, type Crossed, type Gaps } from './newStudy.ts';
 import { smallCrossing } from './smallCrossing.ts';
 
 /** Gaps that hold a figure, 'unknown' among the answers. */
@@ -39,11 +40,13 @@ export interface NewSentenceSpec {
   readonly titles: () => readonly string[];
   /** Keeps the study and opens it; null where the browser keeps nothing. */
   readonly begin: ((study: Study) => void) | null;
+  /** Where the sentence waits when the page is left. */
+  readonly kept: KeptGaps;
 }
 
 /** One sentence with gaps from which a study is begun, what is taken where a gap stays empty, and the crossing as it stands. */
-export function newSentence({ titles, begin }: NewSentenceSpec): HTMLElement {
-  let gaps: Gaps = emptyGaps;
+export function newSentence({ titles, begin, kept }: NewSentenceSpec): HTMLElement {
+  let gaps: Gaps = kept.get();
   const drawn = h('div', { class: 'drawn' });
   const next = h('p', { class: 'next-gap', role: 'status' });
   const datumWords = [h('span', {}), h('span', {})];
@@ -72,6 +75,7 @@ export function newSentence({ titles, begin }: NewSentenceSpec): HTMLElement {
   };
   const put = (change: Partial<Gaps>): void => {
     gaps = { ...gaps, ...change };
+    kept.put(gaps);
     show();
   };
 
@@ -97,8 +101,12 @@ export function newSentence({ titles, begin }: NewSentenceSpec): HTMLElement {
     h(
       'p',
       { class: 'prose' },
-      wordsInput({ label: 'name of the crossing', value: '', most: 500, change: (title) => put({ title }) })
-        .element,
+      wordsInput({
+        label: 'name of the crossing',
+        value: gaps.title,
+        most: 500,
+        change: (title) => put({ title }),
+      }).element,
       ' (its name): a road of ',
       numbered(
         1,

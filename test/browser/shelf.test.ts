@@ -29,6 +29,10 @@ async function bring(page: Page, title: string): Promise<void> {
   await page.locator('.study').first().waitFor();
 }
 
+/** Whether the sentence of a new study has been filled and waits. */
+const waits = (page: Page): Promise<boolean> =>
+  page.evaluate(() => localStorage.getItem('spanledger.new-study') !== null);
+
 describe('shelf', () => {
   it('without a study shows the worked example with its crossing, the cautions and the way on', async () => {
     const { page, heard } = await site.open('index.html');
@@ -52,12 +56,25 @@ describe('shelf', () => {
     await page.getByRole('spinbutton', { name: 'length between the abutments' }).fill('48');
     await page.keyboard.press('Enter');
     await page.getByText('Taken until it is known').waitFor();
+    await page.getByRole('combobox', { name: 'what is crossed' }).selectOption('railway');
+    // Half filled, it waits while the shelf is left.
+    await page.goto(new URL('span-chart.html', site.address).href);
+    await page.goto(new URL('index.html', site.address).href);
+    expect(await page.getByRole('textbox', { name: 'name of the crossing' }).textContent()).toBe(
+      'Kelder crossing',
+    );
+    expect(await page.getByRole('spinbutton', { name: 'length between the abutments' }).textContent()).toBe(
+      '48.0',
+    );
+    expect(await page.getByRole('combobox', { name: 'what is crossed' }).inputValue()).toBe('railway');
+    await page.getByRole('combobox', { name: 'what is crossed' }).selectOption('river');
     await page.locator('.new-study .elevation').waitFor();
     await begin.click();
     await page.waitForURL(/option-study\.html\?study=/u);
     await page.locator('.answer', { hasText: 'are being worked out' }).waitFor();
     await settled(page);
     expect(await page.locator('h1').textContent()).toBe('Kelder crossing');
+    expect(await waits(page)).toBe(false);
     expect(await page.locator('.answer').innerText()).toMatch(/^Option \d+, .* comes out at /u);
     expect(await page.locator('[data-option]').count()).toBeGreaterThan(2);
     expect(await page.locator('[id="1+010"]').innerText()).toContain('Taken at the start');
