@@ -71,7 +71,7 @@ export const crossingHas = (
   widthPx: number,
 ): { readonly handles: boolean; readonly band: boolean } => ({
   handles: scale < 2000,
-  band: scale <= 2000 && widthPx >= 700,
+  band: scale <= 2000 && widthPx >= 480,
 });
 
 /** A span with what it has changed by where there is room for both; nothing where it would touch its neighbours. */

@@ -27,7 +27,8 @@ const nameRoom = 46;
 /**
  * Chainages at which the band states its figures: supports first, then ends of limits and barred stretches, then bends
  * of the ground, then tens; each is taken only where there is room for its figure. The place of an envelope at which least
- * is left steps aside for a support, further along the envelope: what is said to be spare is in the band.
+ * is left steps aside for a support, further along the envelope, and where it cannot the support goes: what is said to be
+ * spare is in the band.
  */
 function bandChainages(
   site: Site,
@@ -51,8 +52,9 @@ function bandChainages(
       const room = (x: number): number =>
         option === null ? 0 : lowestSoffit(site, option, x) - limit.levelM;
       const places = at.sort((one, other) => room(one) - room(other));
-      return { places, middleM: (limit.fromM + limit.toM) / 2 };
+      return { places, middleM: (limit.fromM + limit.toM) / 2, leastM: room(places[0]!) };
     });
+  const leastOfAllM = Math.min(...tightest.map(({ leastM }) => leastM));
   const tens: number[] = [];
   for (let x = Math.ceil(site.startM / 10) * 10; x <= site.endM; x += 10) tens.push(x);
   const widthOf = (at: number): number => Math.max(pitch, textWidth(chainage(at), letters.drawing, 600) + 5);
@@ -75,10 +77,18 @@ function bandChainages(
   take(site.endM, true);
   for (const at of supports) take(at);
   const steps = Array.from({ length: 2 * Math.ceil(pitch) }, (_, px) => px);
-  for (const { places, middleM } of tightest) {
+  for (const { places, middleM, leastM } of tightest) {
     const [lowest] = places as [number, ...number[]];
     const inwards = Math.sign(middleM - lowest);
-    if (!steps.some((px) => take(lowest, false, inwards * px))) places.some((at) => take(at));
+    if (steps.some((px) => take(lowest, false, inwards * px)) || places.some((at) => take(at))) continue;
+    // The least of all is not left out: a support beside it is.
+    const x = frame.x(lowest);
+    if (leastM > leastOfAllM || x < least || x > most) continue;
+    const beside = taken.filter(
+      (other) => Math.abs(other.x - x) < Math.max(pitch, (other.widthPx + widthOf(lowest)) / 2),
+    );
+    for (const other of beside) taken.splice(taken.indexOf(other), 1);
+    take(lowest);
   }
   for (const at of [
     ...site.zones.filter((zone) => zone.hard).flatMap((zone) => [zone.fromM, zone.toM]),

@@ -140,9 +140,37 @@ describe('option study', () => {
   });
 });
 
-it('no lettering touches other or leaves its sheet at 1024 and 400', async () => {
+it('says how the depth was chosen and where depths end, each depth once', async () => {
   const { page } = study;
-  for (const width of [1024, 400]) {
+  const cell = page.locator('[id="4+020"]');
+  await cell.scrollIntoViewIfNeeded();
+  const notes = (): Promise<string> => cell.locator('.notes').innerText();
+  await expect.poll(notes).toContain('the shallowest found within 1 % of the least cost');
+  await expect
+    .poll(notes)
+    .toMatch(/no further than the published band for its spans: \d\.\d\d to \d\.\d\d m/u);
+  const depths = await cell.locator('details.behind tbody tr > :first-child').allTextContents();
+  expect(depths.length).toBeGreaterThan(2);
+  expect(new Set(depths).size).toBe(depths.length);
+});
+
+it('the crossing keeps its band of figures at 720, as at 1440 magnified twice, with the least spare in it', async () => {
+  const { page } = study;
+  const spare = (): Promise<string[]> =>
+    page.locator('[id="1+020"] svg .band [font-weight="600"]').allTextContents();
+  await page.locator('[id="1+020"]').scrollIntoViewIfNeeded();
+  const least = (await spare()).at(-1);
+  expect(least).toMatch(/^\d+\.\d\d$/u);
+  await page.setViewportSize({ width: 720, height: 450 });
+  await page.waitForFunction(() => document.querySelector('[id="1+020"] svg.drawing')!.clientWidth < 700);
+  await page.locator('[id="1+020"]').scrollIntoViewIfNeeded();
+  await expect.poll(async () => (await spare()).at(-1)).toBe(least);
+  await page.setViewportSize({ width: 1440, height: 900 });
+});
+
+it('no lettering touches other or leaves its sheet at 1024, 720 and 400', async () => {
+  const { page } = study;
+  for (const width of [1024, 720, 400]) {
     await page.setViewportSize({ width, height: 900 });
     await page.waitForFunction((px) => document.documentElement.clientWidth === px, width);
     await settled(page);

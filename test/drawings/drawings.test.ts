@@ -79,6 +79,17 @@ describe('crossing(input)', () => {
     expect(bold).toContain('0.42');
   });
 
+  it('keeps the band down to 480 px, with the least spare of all in it', () => {
+    for (const widthPx of [980, 700, 640, 578, 480]) {
+      const piece = crossing({ site, option: second, obstacles, widthPx });
+      const bold = [...elements(piece)]
+        .filter(({ tag, attrs }) => tag === 'text' && attrs['font-weight'] === '600')
+        .flatMap(({ children }) => children);
+      expect([widthPx, bold.includes('0.42')]).toEqual([widthPx, true]);
+    }
+    expect(wordsOf(crossing({ site, option: second, obstacles, widthPx: 358 }))).not.toContain('spare');
+  });
+
   it('says a depth too low in words', () => {
     const deep = {
       ...second,
