@@ -6,10 +6,12 @@ const quarters = [
   /^Q(?<quarter>[1-4])[\s,/-]*(?<year>\d{4})$/iu,
 ];
 
+const isLeap = (year: number): boolean => year % 4 === 0 && (year % 100 !== 0 || year % 400 === 0);
+
 /** Whether a month, and a day of it where one is given, is in the calendar. */
 function isInCalendar(year: number, month: number, day = 1): boolean {
-  const date = new Date(Date.UTC(year, month - 1, day));
-  return date.getUTCMonth() === month - 1 && date.getUTCDate() === day;
+  const days = [31, isLeap(year) ? 29 : 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31][month - 1];
+  return days !== undefined && day >= 1 && day <= days;
 }
 
 /**

@@ -151,7 +151,8 @@ export function stationLine(input: StationLineInput): Piece {
   let state: StationState = 'done';
   const stretches: Piece[] = [];
   for (const mark of marks) {
-    const next = mark.state ?? 'done';
+    // A post has no figures of its own: the line goes on to it as it left the station before.
+    const next: StationState = mark.state ?? (mark.post === true && state === 'held' ? state : 'done');
     stretches.push(stretch(lineX, from, mark.y, next === 'failed' ? 'done' : next, state === 'failed'));
     from = mark.y;
     state = next;

@@ -105,6 +105,25 @@ describe('stationLine', () => {
       stretches.map((stretch) => (isBreak(stretch) ? 'break' : stretch.attrs['stroke-dasharray'])),
     ).toEqual([undefined, '5 4', undefined, 'break', '1.4 3.2', '1.4 3.2']);
   });
+
+  it('stationLine(marks) stays dotted past the post of a section between two stations that are held', () => {
+    const held = stationLine({
+      ...input,
+      marks: [
+        { name: '1+010', y: 100 },
+        { name: '1+020', y: 200, state: 'held' },
+        { name: '2', y: 300, post: true },
+        { name: '2+010', y: 400, state: 'held' },
+        { name: '3', y: 500, post: true },
+        { name: '3+010', y: 600, state: 'done' },
+      ],
+    });
+    const dashes = all(held)
+      .filter(({ attrs }) => attrs['stroke-width'] === '1.35')
+      .map(({ attrs }) => attrs['stroke-dasharray']);
+    const dotted = '1.4 3.2';
+    expect(dashes).toEqual([undefined, dotted, dotted, dotted, dotted, undefined, undefined]);
+  });
 });
 
 describe('keyLine', () => {

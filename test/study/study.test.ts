@@ -342,7 +342,7 @@ describe('readDraft', () => {
 describe('the price date of a budget', () => {
   const dated = (priceDate: string): readonly Problem[] =>
     spoilt((study) => {
-      study['brief']!['budget']!['priceDate'] = set(priceDate);
+      study['brief']!['budget']['priceDate'] = set(priceDate);
     });
 
   it.each(['2026 Q1', '2026-03', '2026-03-15', '2024-02-29', 'unknown'])('%s is taken', (priceDate) => {
