@@ -148,7 +148,7 @@ export function stationLine(input: StationLineInput): Piece {
     { names: usedBy[side], used: false },
   ];
   let from = 0;
-  let state: StationState = 'done';
+  let state = 'done' as StationState;
   const stretches: Piece[] = [];
   for (const mark of marks) {
     // A post has no figures of its own: the line goes on to it as it left the station before.
