@@ -54,6 +54,7 @@ export {
 } from './site/index.ts';
 export {
   asPriceDate,
+  askedOf,
   fillGround,
   fingerprint,
   groundLabels,

@@ -298,10 +298,12 @@ interface Priorities {
   readonly weights: Readonly<Record<string, number>>;
 }
 
-interface Note {
+export interface Note {
+  /** A station of the page, '3+020', or an option, 'option 3'. */
   readonly about: string;
   readonly text: string;
   readonly author: string;
+  /** Day of its words, '2026-03-02', or as it was written elsewhere. */
   readonly date: string;
 }
 

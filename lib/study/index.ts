@@ -1,3 +1,4 @@
+export { askedOf } from './asked.ts';
 export { fillGround, groundLabels } from './fillGround.ts';
 export { asPriceDate } from './priceDate.ts';
 export { parseStudy, readDraft, readStudy } from './readStudy.ts';

@@ -1,6 +1,7 @@
 import { sha256 } from '@noble/hashes/sha2.js';
 import { bytesToHex, utf8ToBytes } from '@noble/hashes/utils.js';
 import type { Study } from '../model/index.ts';
+import { askedOf } from './asked.ts';
 
 /** Canonical JSON of plain data: keys in code unit order, no white space, absent values left out. */
 function canonical(value: unknown): string {
@@ -21,10 +22,10 @@ export function writeStudy(study: Study): string {
 }
 
 /**
- * SHA-256 of the canonical JSON in UTF-8, 64 hexadecimal figures. The register is left out: it remembers the numbers that
- * options have been given and asks nothing, so a study that is changed and changed back is the same study.
+ * SHA-256 of the canonical JSON in UTF-8, 64 hexadecimal figures, of what the study asks: its register remembers the
+ * numbers that options have been given, its notes and its decision tell of the answer, and none of them changes it. So a
+ * study that is changed and changed back, and one that a note is written to, keeps its fingerprint.
  */
 export function fingerprint(study: Study): string {
-  const asked = { ...study, options: { ...study.options, register: [] } };
-  return bytesToHex(sha256(utf8ToBytes(writeStudy(asked))));
+  return bytesToHex(sha256(utf8ToBytes(writeStudy(askedOf(study)))));
 }

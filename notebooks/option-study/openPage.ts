@@ -12,6 +12,7 @@ import { exampleNamed } from '../exampleNames.ts';
 import { workedExample } from '../examples.ts';
 import { h } from '../html.ts';
 import {
+  dayOf,
   deviceCupboard,
   fieldsOf,
   fileName,
@@ -47,6 +48,7 @@ import { costSection } from './costSection.ts';
 import { depthSection } from './depthSection.ts';
 import { heldNote } from './heldNote.ts';
 import { openedNote } from './openedNote.ts';
+import { typedNotes } from './notes/typedNotes.ts';
 import { programmeSection, tradeOffSection } from './programmeSection.ts';
 import { quantitySection } from './quantitySection.ts';
 import { rankingSection } from './rankingSection.ts';
@@ -123,7 +125,12 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
   const store = studyStore(graph, study, check, () => kept?.mayChange() ?? true);
   if (draft !== null) store.open(study, draft);
   const cells = studyCells(graph, store, workers);
-  const page = sheet(graph, { aside: [cells.byDepth, cells.spanning], held: store.held });
+  const today = (): string => dayOf(new Date());
+  const page = sheet(graph, {
+    aside: [cells.byDepth, cells.spanning],
+    held: store.held,
+    beside: typedNotes({ graph, store, appraisal: cells.appraisal, today }),
+  });
 
   const saved = h('span', { class: 'state', role: 'status' }, problem);
   /** Said of a study that was opened from a file until it is changed. */

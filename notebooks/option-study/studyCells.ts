@@ -1,10 +1,9 @@
-import { appraiseKept, depthTrials, formFacts, guide, memory, survey } from '../../lib/index.ts';
+import { appraiseKept, askedOf, depthTrials, formFacts, guide, memory, survey } from '../../lib/index.ts';
 import type { Appraisal, AppraisedOption, RegisterEntry, Study } from '../../lib/index.ts';
 import type { Hold } from '../drawing/hold.ts';
 import type { InHand } from '../drawing/supportHandles.ts';
 import { idle, share, untilDragRests, whenIdle, type StudyStore } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
-import { askedOf } from '../worked/askedOf.ts';
 import type { Appraiser } from '../worker/index.ts';
 import { rehearsal } from './rehearsal.ts';
 

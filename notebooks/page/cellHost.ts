@@ -82,6 +82,8 @@ export interface CellHost {
   readonly element: HTMLElement;
   /** The label whose middle is the place of the station. */
   readonly label: HTMLElement;
+  /** Puts something into its margin, below the notes of its own. */
+  readonly addToMargin: (child: HtmlChild) => void;
   readonly state: () => StationState;
   /** Begins to show: call once the element stands in the page. */
   readonly begin: () => void;
@@ -116,8 +118,9 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
   const place = Number(station.replace('+', '.'));
   const label = h('a', { class: 'station', href: `#${station}` }, station);
   const body = h('div', { class: 'body' });
-  const notes =
-    spec.notes === undefined ? null : h('aside', { class: 'notes', 'aria-label': `Notes to ${station}` });
+  const margin = h('aside', { class: 'notes', 'aria-label': `Notes to ${station}` });
+  const notes = spec.notes === undefined ? null : h('div', { class: 'given' });
+  if (notes !== null) margin.append(notes);
   const failure = h('div', { class: 'said', role: 'status' });
   const status = h('p', { class: 'status-words', role: 'status', id: `${station}-status` });
   const element = h(
@@ -132,7 +135,7 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     label,
     failure,
     body,
-    notes,
+    notes === null ? null : margin,
     status,
   );
 
@@ -288,6 +291,10 @@ export function cellHost<const U extends Uses>(page: HostPage, spec: CellSpec<U>
     owns: spec.owns ?? [],
     element,
     label,
+    addToMargin(child) {
+      if (!margin.isConnected) status.before(margin);
+      margin.append(...h('div', {}, child).childNodes);
+    },
     state: stationState,
     begin() {
       const standing = (part: Part<U>): HtmlChild => (typeof part === 'function' ? null : part);

@@ -1,6 +1,7 @@
 export { sheet, type BarSpec, type HeadSpec, type PageSpec, type Sheet, type SheetOptions } from './sheet.ts';
 export { supportsWords } from './heldWords.ts';
 export { printUpright } from './paper.ts';
+export { dayOf, dayWords } from './days.ts';
 export { pagesFrom, type PageName } from './pages.ts';
 export type { CellHost, CellSpec, Explained, Part, Room } from './cellHost.ts';
 export type { LineSection } from './stationLines.ts';

@@ -1,3 +1,5 @@
+import { dateWords } from './days.ts';
+
 /** Class of the root while the page is printed on sheets held upright. */
 const UPRIGHT = 'upright';
 
@@ -10,10 +12,6 @@ export function printUpright(): void {
   addEventListener('afterprint', () => classList.remove(UPRIGHT), { once: true });
   print();
 }
-
-/** '2 December 2026'. */
-const dateWords = (date: Date): string =>
-  date.toLocaleDateString('en-GB', { day: 'numeric', month: 'long', year: 'numeric' });
 
 /** Words as a string of a style sheet. */
 const quoted = (words: string): string =>

@@ -56,6 +56,8 @@ export interface SheetOptions {
   readonly aside?: readonly Cell<unknown>[];
   /** Names of the inputs that keep an older value, because what was typed over it is refused. */
   readonly held?: Cell<readonly string[]>;
+  /** What stands in the margin of a cell below the notes of its own, e.g. notes typed by whoever reads it. */
+  readonly beside?: (station: string, stations: readonly string[]) => HtmlChild;
 }
 
 /** The page of a notebook: builders for its parts, all tied to one graph. */
@@ -149,7 +151,10 @@ const head = ({ title, answer, next, block }: HeadSpec): HTMLElement =>
  * A page on which cells of a graph are shown. Build cells and sections in page order, then mount them once.
  * Sections get the ids 's1', 's2' ..., cells the id of their station.
  */
-export function sheet(graph: Graph, { explain = messageOf, aside = [], held }: SheetOptions = {}): Sheet {
+export function sheet(
+  graph: Graph,
+  { explain = messageOf, aside = [], beside, held }: SheetOptions = {},
+): Sheet {
   const queue = frames(screenFrames.drawing);
   const element = h('main', { class: 'sheet' });
   const stops: (() => void)[] = [];
@@ -304,6 +309,10 @@ export function sheet(graph: Graph, { explain = messageOf, aside = [], held }: S
       for (const host of hosts()) {
         const { element: cell } = host;
         cell.querySelector(':scope > .body')?.after(drawingActions(cell, heading, onFullSheet(host)));
+      }
+      if (beside !== undefined) {
+        const stations = known.map(({ name }) => name);
+        for (const host of hosts()) host.addToMargin(beside(host.station, stations));
       }
       root.append(element);
       sizes = heights(

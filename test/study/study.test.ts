@@ -309,6 +309,17 @@ describe('fingerprint', () => {
     expect(writeStudy(numbered)).not.toBe(writeStudy(study));
     expect(fingerprint(numbered)).toBe(fingerprint(study));
   });
+
+  it('fingerprint(study) is that of what is asked: a note, a decision and the reference change nothing of it', () => {
+    const study = lowFerry();
+    const told: Study = {
+      ...study,
+      options: { ...study.options, reference: 2 },
+      notes: [{ about: '3+020', text: 'Ask the railway', author: 'A. Mason', date: '2026-03-02' }],
+    };
+    expect(fingerprint(told)).toBe(fingerprint(study));
+    expect(fingerprint({ ...told, brief: { ...told.brief, surfacingM: 0.1 } })).not.toBe(fingerprint(study));
+  });
 });
 
 describe('readDraft', () => {

@@ -1,9 +1,8 @@
 import { describe, expect, it } from 'vitest';
-import { appraise, fingerprint, type Appraisal, type Study } from '../../lib/index.ts';
+import { appraise, askedOf, fingerprint, type Appraisal, type Study } from '../../lib/index.ts';
 import { workedExample } from '../../notebooks/examples.ts';
 import { readAnswer, writeAnswer } from '../../notebooks/worked/answerText.ts';
 import { answeredFirst } from '../../notebooks/worked/answeredFirst.ts';
-import { askedOf } from '../../notebooks/worked/askedOf.ts';
 import type { Appraiser } from '../../notebooks/worker/index.ts';
 
 const study = askedOf({

@@ -73,7 +73,7 @@ const cell = (name: string, content: HtmlChild, notes: HtmlChild = null, isWide 
     { class: isWide ? (name === '3+020' ? 'cell wide long' : 'cell wide') : 'cell', id: name },
     h('a', { class: 'station', href: `#${name}` }, name),
     h('div', { class: 'body' }, content),
-    notes === null ? null : h('aside', { class: 'notes' }, notes),
+    notes === null ? null : h('aside', { class: 'notes' }, h('div', { class: 'given' }, notes)),
   );
 const part = (number: number, name: string, finding: string, ...cells: HTMLElement[]): HTMLElement =>
   h(
