@@ -1,2 +1,4 @@
 export type { Contender } from './contender.ts';
+export { changedOption, draftDecision } from './draftDecision.ts';
+export { issuedOn, sinceIssued } from './issued.ts';
 export { stand } from './stand.ts';

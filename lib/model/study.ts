@@ -307,9 +307,38 @@ export interface Note {
   readonly date: string;
 }
 
+/** Which option is taken forward and why, as it was drafted and then edited; once issued, with what it was decided on. */
 export interface Decision {
   readonly option: number;
   readonly reasons: readonly string[];
+  /** Why each other option was dropped. */
+  readonly dropped: readonly { readonly option: number; readonly reason: string }[];
+  /** What is still to be found out. */
+  readonly questions: readonly string[];
+  /** Who does not agree, and why; '' where nobody has said so. */
+  readonly dissent: string;
+  /** Who decided, and the day of it, '2026-03-02'. */
   readonly author: string;
   readonly date: string;
+  /** Null while it is a draft. */
+  readonly issued: Issued | null;
+}
+
+/** What a decision stood on when it was issued: the fingerprint of what was asked, and what came of it. */
+export interface Issued {
+  readonly date: string;
+  readonly fingerprint: string;
+  readonly currency: string;
+  readonly leader: number | null;
+  readonly options: readonly IssuedOption[];
+}
+
+/** An option as it stood when a decision was issued; money of the study's currency. */
+interface IssuedOption {
+  readonly number: number;
+  readonly form: FormId;
+  readonly status: 'in' | 'possible' | 'out';
+  readonly p10: number;
+  readonly p50: number;
+  readonly p90: number;
 }

@@ -255,6 +255,26 @@ function optionProblems({ options }: Study): Problem[] {
   return found;
 }
 
+/** A decision drops no option twice, and not the one it takes forward; one that is issued knows what that came to. */
+function decisionProblems({ decision }: Study): Problem[] {
+  if (decision === null) return [];
+  const { option: taken, dropped, issued } = decision;
+  const found = dropped.flatMap(({ option }, i) => {
+    const isFirst = dropped.findIndex((other) => other.option === option) === i;
+    if (isFirst && option !== taken) return [];
+    const expected =
+      option === taken ? `another option than ${taken}, which is taken forward` : 'an option dropped once';
+    const remedy = 'Take this entry out';
+    return [problem('refused', ['decision', 'dropped', i, 'option'], expected, `${option}`, { remedy })];
+  });
+  if (issued !== null && issued.options.every(({ number }) => number !== taken)) {
+    const remedy = 'Name an option of the results it was issued with, or leave `issued` empty';
+    const expected = 'an option that had been worked out when it was issued';
+    found.push(problem('refused', ['decision', 'option'], expected, `${taken}`, { remedy }));
+  }
+  return found;
+}
+
 /** What a study must also satisfy beyond the shape of its file; all problems, in the order of the file. */
 export function checkStudy(study: Study): Problem[] {
   const { brief } = study;
@@ -266,5 +286,6 @@ export function checkStudy(study: Study): Problem[] {
     ...groundProblems(brief),
     ...bookProblems(study),
     ...optionProblems(study),
+    ...decisionProblems(study),
   ];
 }

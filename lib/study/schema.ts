@@ -242,11 +242,37 @@ const priorities = z.strictObject({
   weights: z.record(z.string().max(200), z.number().min(0).max(1e6)).default({}),
 });
 const note = z.strictObject({ about: name, text, author: text.default(''), date: text.default('') });
+const issued = z.strictObject({
+  date: text,
+  fingerprint: z.string().regex(/^[0-9a-f]{64}$/u),
+  currency: z.string().min(1).max(10),
+  leader: optionNumber.nullable(),
+  options: z
+    .array(
+      z.strictObject({
+        number: optionNumber,
+        form,
+        status: z.enum(['in', 'possible', 'out']),
+        p10: z.number(),
+        p50: z.number(),
+        p90: z.number(),
+      }),
+    )
+    .min(1)
+    .max(1000),
+});
 const decision = z.strictObject({
   option: optionNumber,
   reasons: z.array(text).max(1000).default([]),
+  dropped: z
+    .array(z.strictObject({ option: optionNumber, reason: text }))
+    .max(1000)
+    .default([]),
+  questions: z.array(text).max(1000).default([]),
+  dissent: text.default(''),
   author: text.default(''),
   date: text.default(''),
+  issued: issued.nullable().default(null),
 });
 
 /** The study file, version `studyVersion`: strict keys, every default applied once; its output is `Study`. */

@@ -45,6 +45,7 @@ import { arrangementSection } from './arrangementSection.ts';
 import { problemBeside } from './brief/problemBeside.ts';
 import { briefSection } from './briefSection.ts';
 import { costSection } from './costSection.ts';
+import { decisionSection } from './decision/decisionSection.ts';
 import { depthSection } from './depthSection.ts';
 import { heldNote } from './heldNote.ts';
 import { openedNote } from './openedNote.ts';
@@ -252,6 +253,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
       programmeSection(page, cells),
       tradeOffSection(page, cells),
       rankingSection(page, cells),
+      decisionSection(page, graph, store, cells, today),
     ],
   });
   studyWhereFrom(graph, cells, element);

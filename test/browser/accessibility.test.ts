@@ -45,6 +45,11 @@ describe('the option study', () => {
     await page.setViewportSize({ width, height: 900 });
     await settled(page);
     await page.locator('details.choices').evaluate((fold: HTMLDetailsElement) => (fold.open = true));
+    // What is said of the study by those who read it: a note in the margin and a decision.
+    await page.getByRole('button', { name: 'Record a decision' }).click();
+    await page.getByRole('button', { name: 'Note to 11+010' }).click();
+    await page.keyboard.type('Ask the board');
+    await page.keyboard.press('Enter');
     await page.locator('.choices [role="spinbutton"]').first().scrollIntoViewIfNeeded();
     expect(await faultsOf(page)).toEqual([]);
   });

@@ -4,6 +4,7 @@ import { dayWords, putAt, standing, type Fields, type StudyStore } from '../../p
 import type { Cell, Graph } from '../../reactive/index.ts';
 import { focusField } from '../brief/fieldTable.ts';
 import { problemBeside } from '../brief/problemBeside.ts';
+import { leaveEmptied } from './leaveEmptied.ts';
 import { aboutOption, firstNote, optionIn, withNoteText } from './noteEdits.ts';
 
 /** Station of the ranking, where notes on options stand, and those on what this page does not have. */
@@ -170,12 +171,7 @@ export function typedNotes({
     });
     const { element } = notes;
     element.classList.add('typed-notes');
-    // An emptied note goes, and the hand leaves its field before: what it typed there next would be about nothing.
-    const leaveEmpty = (event: KeyboardEvent): void => {
-      if (event.key !== 'Enter' || !(event.target instanceof HTMLElement)) return;
-      if (event.target.matches('.words') && event.target.textContent.trim() === '') event.target.blur();
-    };
-    element.addEventListener('keydown', leaveEmpty, { capture: true });
+    leaveEmptied(element);
     const action = (words: string, name: string, kind: string, act: () => void): HTMLElement =>
       h('button', { type: 'button', class: `action list ${kind}`, 'aria-label': name, onclick: act }, words);
     return [
