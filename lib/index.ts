@@ -24,7 +24,7 @@ export { ruledOut } from './appraise/ruledOut.ts';
 export { memory, type Memory } from './appraise/memory.ts';
 export { workbench, type Workbench } from './appraise/workbench.ts';
 export { publishedBands, type BandColumn, type PublishedBand } from './bands/publishedBands.ts';
-export { figure, figurePaths, type Context as FigureContext } from './explain/index.ts';
+export { figure, figurePaths, trialFigure, type Context as FigureContext } from './explain/index.ts';
 export { formModule, sizeableForms } from './forms/index.ts';
 export {
   builtBucket,

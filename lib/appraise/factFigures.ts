@@ -1,7 +1,8 @@
-import { described, type At, type Descriptor } from '../model/index.ts';
+import { described, practice, type At, type Descriptor } from '../model/index.ts';
 import { factDictionary } from '../rules/index.ts';
 import { asIs, fact, factOf, factsOf } from './factFigure.ts';
 import { methodFactFigures } from './methodFactFigures.ts';
+import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 import { regradingFactFigures } from './regradingFigures.ts';
 import { riverFactFigures } from './riverFactFigures.ts';
 import { supportFactFigures } from './supportFactFigures.ts';
@@ -59,6 +60,22 @@ const standing = (id: string, formula: string, isHard: boolean): Descriptor =>
 
 /** What the rules are asked with, fact by fact. */
 export const factFigures: readonly Descriptor[] = [
+  practice(
+    'site/pierHalfWidth',
+    PIER_HALF_WIDTH_M,
+    'half the width of a pier beside a barred stretch',
+    'm',
+    'common-practice',
+  ),
+  described({
+    path: 'site/mainSpanM',
+    label: 'span that the widest barred stretch asks for',
+    unit: 'm',
+    method: 'sum',
+    formula: 'clear opening + half a pier on either side',
+    inputs: () => ({ clear: 'site/mainOpening/widthM', pier: 'practice/site/pierHalfWidth' }),
+    compute: ({ clear, pier }) => clear + 2 * pier,
+  }),
   fact(
     'mainSpanM',
     'longest span of the main unit',

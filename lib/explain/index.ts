@@ -1,2 +1,3 @@
 export type { Context } from './at.ts';
+export { trialContext, trialFigure } from './trialFigure.ts';
 export { figure, figurePaths, rebuilt } from './figure.ts';

@@ -22,6 +22,7 @@ import { portalFigures } from '../forms/portal-frame/figures.ts';
 import { slabBridgeFigures } from '../forms/slab/figures.ts';
 import { steelBoxFigures } from '../forms/steel-box/figures.ts';
 import { trussFigures } from '../forms/truss/figures.ts';
+import { builtFigures } from '../bands/builtFigures.ts';
 import type { Descriptor } from '../model/index.ts';
 import { priceFigures } from '../price/figures.ts';
 import { programmeFigures } from '../programme/figures.ts';
@@ -90,5 +91,6 @@ export const manual: readonly Descriptor[] = [
   ...factFigures,
   ...rulingFigures,
   ...standingFigures,
+  ...builtFigures,
   ...dataFigures,
 ];

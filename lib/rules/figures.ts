@@ -61,6 +61,14 @@ export const windowFigures: readonly Descriptor[] = [
     (at) => spanWindow(form(at)).possible,
   ),
   ...window(
+    'usual',
+    'usual span',
+    'm',
+    'range that guidance favours, at least',
+    'span',
+    (at) => spanWindow(form(at)).usual,
+  ),
+  ...window(
     'endRatio',
     'end span over the next',
     '',

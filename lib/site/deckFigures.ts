@@ -31,6 +31,15 @@ export const deckFigures: readonly Descriptor[] = [
     compute: ({ all }) => sum(all),
   }),
   described({
+    path: 'site/deck/ultimateWidthM',
+    label: 'deck width in the ultimate layout',
+    unit: 'm',
+    method: 'sum',
+    formula: 'sum of the strips in the ultimate layout',
+    inputs: (at) => ({ all: at.study.brief.deck.map((_, i) => `brief/deck/${i}/ultimateWidthM`) }),
+    compute: ({ all }) => sum(all),
+  }),
+  described({
     path: 'site/deck/carriagewayM',
     label: 'width between kerbs',
     unit: 'm',

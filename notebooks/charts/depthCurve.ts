@@ -1,6 +1,7 @@
 import { curveMonotoneX, line as lineOf } from 'd3-shape';
 import { fixed, level, money2, moneyUnit } from '../format.ts';
 import { linearAxis } from '../drawing/axis.ts';
+import type { Asked } from '../drawing/asked.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
@@ -12,10 +13,17 @@ import { formInk } from '../forms/formInk.ts';
 import type { FormId } from '../model.ts';
 import type { Table } from './table.ts';
 
+/** A depth at midspan, m, and the cost of the whole crossing with it, each with where it comes from where that can be asked. */
+interface DepthPoint {
+  readonly depthM: number;
+  readonly cost: number;
+  readonly figures?: { readonly depthM: Asked; readonly cost: Asked };
+}
+
 export interface DepthCurveInput {
   readonly form: FormId;
   /** Cost of the whole crossing at each depth at midspan that was worked out, rising. */
-  readonly points: readonly { readonly depthM: number; readonly cost: number }[];
+  readonly points: readonly DepthPoint[];
   /** Depth the option has now, m. */
   readonly depthM: number;
   /** Depths at which something ends: a check is full, the road begins to rise. */
@@ -109,12 +117,13 @@ export function depthCurve(input: DepthCurveInput): Piece {
     .curve(curveMonotoneX)
     .digits(2);
   const flat = flatStretch(points);
-  const now =
-    points.length === 0
-      ? NaN
-      : points.reduce((best, one) =>
-          Math.abs(one.depthM - input.depthM) < Math.abs(best.depthM - input.depthM) ? one : best,
-        ).cost;
+  const own = points.reduce<DepthPoint | undefined>(
+    (best, one) =>
+      best === undefined || Math.abs(one.depthM - input.depthM) < Math.abs(best.depthM - input.depthM)
+        ? one
+        : best,
+    undefined,
+  );
   const last = points[points.length - 1];
   return sheet(widthPx, bottom + (narrow ? 38 : 34), 'Cost of the whole crossing against depth at midspan', [
     flat !== null &&
@@ -201,22 +210,23 @@ export function depthCurve(input: DepthCurveInput): Piece {
         }),
       );
     }),
-    Number.isFinite(now) &&
+    own !== undefined &&
       g(
         {},
         el('circle', {
           cx: axis.x(input.depthM),
-          cy: over.x(overLeast(now, least)),
+          cy: over.x(overLeast(own.cost, least)),
           r: 5,
           fill: colours.ink,
           stroke: colours.sheet,
           'stroke-width': 1.35,
         }),
-        label(axis.x(input.depthM), over.x(overLeast(now, least)) - 11, level(input.depthM), {
+        label(axis.x(input.depthM), over.x(overLeast(own.cost, least)) - 11, level(input.depthM), {
           anchor: 'middle',
           size: letters.table,
           weight: 600,
           halo: true,
+          figure: own.figures?.depthM,
         }),
       ),
   ]);
@@ -229,9 +239,9 @@ export function depthTable(input: DepthCurveInput): Table {
   return {
     caption: 'Cost of the whole crossing against depth at midspan',
     head: ['depth, m', unit.label, '% over the least'],
-    rows: input.points.map(({ depthM, cost }) => [
-      level(depthM),
-      money2(cost / unit.per),
+    rows: input.points.map(({ depthM, cost, figures }) => [
+      { text: level(depthM), figure: figures?.depthM },
+      { text: money2(cost / unit.per), figure: figures?.cost },
       fixed(overLeast(cost, least), 1),
     ]),
   };

@@ -1,3 +1,4 @@
+import type { Asked } from '../drawing/asked.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
 import { textWidth } from '../drawing/lettering.ts';
@@ -30,6 +31,7 @@ export function limitLine(
   words: string,
   accent: string,
   right: number,
+  figure?: Asked,
 ): Piece {
   const fits = (said: string): boolean => textWidth(said, letters.table, 600) + 6 <= Math.max(right - x, x);
   // On a narrow sheet only what stands before the colon.
@@ -49,6 +51,7 @@ export function limitLine(
       fill: accent,
       anchor: turned ? 'end' : 'start',
       halo: true,
+      figure,
     }),
   );
 }

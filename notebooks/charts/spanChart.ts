@@ -1,5 +1,6 @@
 import { scaleLog } from 'd3-scale';
 import { fixed, length } from '../format.ts';
+import { dataFigure, type Asked } from '../drawing/asked.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import type { Paper } from '../drawing/ink.ts';
 import { label } from '../drawing/label.ts';
@@ -32,6 +33,17 @@ export interface SpanRow {
   readonly words: string;
   /** How far from another standing, in words. */
   readonly flip?: string;
+  /** Where its figures come from, where they can be asked. */
+  readonly figures?: SpanFigures;
+}
+
+/** Paths of the figures of a row; undefined for one that is no figure, e.g. the end of an axis. */
+export interface SpanFigures {
+  readonly usual: readonly [from: Asked, to: Asked];
+  readonly possible: readonly [from: Asked, to: Asked];
+  /** 5, 50 and 95 % of built bridges; empty where none are on record. */
+  readonly statistics: readonly Asked[];
+  readonly bridges: Asked;
 }
 
 export interface SpanChartInput {
@@ -40,6 +52,8 @@ export interface SpanChartInput {
   readonly askedM: number | null;
   /** Beside the asked span, e.g. '63 m asked: 60 clear, plus a pier'. */
   readonly askedWords?: string;
+  /** Which figure the asked span is. */
+  readonly askedFigure?: Asked;
   /** Firmer lines part families, or in, possible and out; families unless said. */
   readonly groups?: 'family' | 'status';
   /** Ends of the span axis, m; what the rows need unless given. */
@@ -72,8 +86,10 @@ function bars(row: SpanRow, y: number, x: (m: number) => number, ink: FormInk): 
   const line = out ? colours.rule : ink.line(row.form);
   const fill = out && ink.paper === 'colour' ? colours.rule : ink.bar(row.form);
   const [from, to] = row.possible ?? row.usual;
+  const { figures } = row;
+  const all = figures && [...figures.usual, ...figures.possible, ...figures.statistics];
   return g(
-    {},
+    { 'data-figure': dataFigure(all?.filter((path) => typeof path === 'string')) },
     el('path', {
       d: `M${num(x(from))},${num(y)}H${num(x(to))}`,
       stroke: line,
@@ -186,7 +202,15 @@ export function spanChart(input: SpanChartInput): Piece {
       rows.map((row, index) => bars(row, middleOf(index), x, ink)),
       // Over the bars, under the lettering.
       askedM !== null &&
-        limitLine(x(askedM), 2, bottom, input.askedWords ?? `${length(askedM)} m asked`, ink.accent, widthPx),
+        limitLine(
+          x(askedM),
+          2,
+          bottom,
+          input.askedWords ?? `${length(askedM)} m asked`,
+          ink.accent,
+          widthPx,
+          input.askedFigure,
+        ),
       rows.map((row, index) => {
         const y = middleOf(index);
         const out = row.status === 'out';
@@ -247,12 +271,16 @@ export const spanTable = (input: SpanChartInput): Table => ({
   ],
   rows: input.rows.map((row) => [
     formLooks[row.form].name,
-    length(row.usual[0]),
-    length(row.usual[1]),
-    row.possible === undefined ? '' : length(row.possible[0]),
-    row.possible === undefined ? '' : length(row.possible[1]),
-    row.bridges === undefined ? '' : fixed(row.bridges, 0),
-    ...(row.statistics?.map(length) ?? ['', '', '']),
+    { text: length(row.usual[0]), figure: row.figures?.usual[0] },
+    { text: length(row.usual[1]), figure: row.figures?.usual[1] },
+    row.possible === undefined ? '' : { text: length(row.possible[0]), figure: row.figures?.possible[0] },
+    row.possible === undefined ? '' : { text: length(row.possible[1]), figure: row.figures?.possible[1] },
+    row.bridges === undefined ? '' : { text: fixed(row.bridges, 0), figure: row.figures?.bridges },
+    ...(row.statistics?.map((span, i) => ({ text: length(span), figure: row.figures?.statistics[i] })) ?? [
+      '',
+      '',
+      '',
+    ]),
     row.status,
     row.flip === undefined ? row.words : `${row.words}; ${row.flip}`,
   ]),

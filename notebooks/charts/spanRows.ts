@@ -1,7 +1,7 @@
 import { builtSpans, fact, printed, spanWindow } from '../../lib/index.ts';
 import type { FormId, Guide, GuideForm } from '../../lib/index.ts';
 import { fixed, plain } from '../format.ts';
-import type { SpanRow } from './spanChart.ts';
+import type { SpanFigures, SpanRow } from './spanChart.ts';
 
 /** Left end of the span axis, m: forms without a least span begin here. */
 const LEAST_M = 4;
@@ -54,8 +54,24 @@ export function flipWords({ flip }: Pick<GuideForm, 'flip'>): string | undefined
 /** Keeps figure and unit on one line. */
 const unbroken = (words: string): string => words.replace(/(\d) (m)\b/gu, '$1\u00a0$2');
 
-/** Rows of the span chart for an answer, forms in the order given. */
-export const spanRows = (guide: Guide, order: readonly FormId[]): readonly SpanRow[] =>
+/** Figures of a row by the rules and the record behind them; the end of the axis is none. */
+function figuresOf(form: FormId, possible: readonly [number, number], isBuilt: boolean): SpanFigures {
+  const ends = (window: string) =>
+    [`windows/${form}/${window}/least`, `windows/${form}/${window}/most`] as const;
+  const [least, most] = ends('span');
+  return {
+    usual: ends('usual'),
+    possible: [possible[0] < LEAST_M ? undefined : least, most],
+    statistics: isBuilt ? [`built/${form}/p5`, `built/${form}/p50`, `built/${form}/p95`] : [],
+    bridges: `built/${form}/count`,
+  };
+}
+
+/**
+ * Rows of the span chart for an answer, forms in the order given.
+ * @param isAsked whether the figures can be asked where they come from on the page that shows them
+ */
+export const spanRows = (guide: Guide, order: readonly FormId[], isAsked = false): readonly SpanRow[] =>
   order.map((form) => {
     const { possible, usual } = spanWindow(form);
     const answer = guide.forms.find((entry) => entry.form === form)!;
@@ -70,6 +86,7 @@ export const spanRows = (guide: Guide, order: readonly FormId[]): readonly SpanR
         : { statistics: [built.p5, built.p50, built.p95] as const, bridges: built.count }),
       status: answer.status,
       words: unbroken(answer.because.join('; ')),
+      ...(isAsked && { figures: figuresOf(form, possible, built !== null) }),
       ...(flip === undefined ? {} : { flip: unbroken(flip) }),
     };
   });

@@ -38,7 +38,7 @@ export function tablePiece(table: Table): Piece {
           row.map((cell, index) => {
             const { text, figure } = typeof cell === 'string' ? { text: cell, figure: undefined } : cell;
             return index === 0
-              ? el('th', { scope: 'row' }, text)
+              ? el('th', { scope: 'row', 'data-figure': dataFigure(figure) }, text)
               : el('td', { 'data-figure': dataFigure(figure) }, text);
           }),
         ),

@@ -39,3 +39,12 @@ export const overOf = (
   chainageM: number,
   field: 'roadM' | 'structureM' | 'soffitM' | 'leastM' | 'spareM' | 'fallM',
 ): string => ofOption(option, `over/${String(chainageM)}/${field}`);
+
+/** Path of a figure of an option tried at another depth beside the study, by the place of the trial among them. */
+export const ofTrial = (index: number, path: string): string => `depths/${index}/${path}`;
+
+/** Of which trial a path tells, and what of it; null for a figure of the study. */
+export function trialIn(path: string): { readonly index: number; readonly path: string } | null {
+  const [, index, rest] = /^depths\/(\d+)\/(.+)$/u.exec(path) ?? [];
+  return index === undefined || rest === undefined ? null : { index: Number(index), path: rest };
+}

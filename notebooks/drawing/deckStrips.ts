@@ -99,7 +99,11 @@ function crossfalls(place: Place, crossfall: number, ends: readonly number[]): C
     const fromM = ends[i]!;
     const middle = (place.x(fromM) + place.x(toM)) / 2;
     if (place.x(toM) - place.x(fromM) < 44) return null;
-    return label(middle, place.y(0) - 14, words, { anchor: 'middle', fill: colours.second });
+    return label(middle, place.y(0) - 14, words, {
+      anchor: 'middle',
+      fill: colours.second,
+      figure: 'practice/site/crossfall',
+    });
   });
 }
 

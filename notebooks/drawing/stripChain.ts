@@ -1,3 +1,4 @@
+import type { Asked } from './asked.ts';
 import { level } from '../format.ts';
 import { dimensionChain } from './dimension.ts';
 import { colours, letters, pens } from './ink.ts';
@@ -17,6 +18,8 @@ export interface StripChainInput {
   readonly marginPx: number;
   /** What the overall dimension is of, where it is not the deck as first built. */
   readonly what?: string;
+  /** Which figure the overall dimension is. */
+  readonly figure?: Asked;
 }
 
 /** From the top of a chain to its dimension line, px. */
@@ -25,7 +28,15 @@ export const CHAIN_TOP_PX = 12;
 const CHAIN_FOOT_PX = 30;
 
 /** Dimension lines under a deck: its strips, room for the words of each, and the overall width at the foot. */
-export function stripChain({ edges, leaders, wordsPx, overallM, marginPx, what }: StripChainInput): Piece {
+export function stripChain({
+  edges,
+  leaders,
+  wordsPx,
+  overallM,
+  marginPx,
+  what,
+  figure,
+}: StripChainInput): Piece {
   const [first, last] = [edges[0] ?? 0, edges.at(-1) ?? 0];
   const overallY = CHAIN_TOP_PX + wordsPx + 18;
   const words = `${level(overallM)}${what === undefined ? '' : ` ${what}`}`;
@@ -42,6 +53,11 @@ export function stripChain({ edges, leaders, wordsPx, overallM, marginPx, what }
     }),
     dimensionChain(edges, CHAIN_TOP_PX, []),
     dimensionChain([first, last], overallY, []),
-    label((first + last) / 2, overallY - 5, words, { anchor: 'middle', size: letters.table, weight: 600 }),
+    label((first + last) / 2, overallY - 5, words, {
+      anchor: 'middle',
+      size: letters.table,
+      weight: 600,
+      figure,
+    }),
   ]);
 }

@@ -1,7 +1,7 @@
 import { depthBandOf, type Study } from '../../lib/index.ts';
 import { depthCurve, depthTable, oncePerDepth, type DepthCurveInput } from '../charts/depthCurve.ts';
 import { tableBehind } from '../charts/table.ts';
-import { ofOption } from '../drawing/asked.ts';
+import { ofOption, ofTrial } from '../drawing/asked.ts';
 import { ladder } from '../drawing/ladder.ts';
 import { fixed, level } from '../format.ts';
 import { h, type HtmlChild } from '../html.ts';
@@ -78,7 +78,14 @@ export function depthSection(page: Sheet, cells: StudyCells): LineSection {
         const own = v.reference;
         const worked = v.byDepth.filter(({ number }) => number === own?.number);
         const points = oncePerDepth(
-          worked.map(({ depthM, cost }) => ({ depthM: depthM.midspan, cost: cost.p50 })),
+          worked.map((trial, i) => ({
+            depthM: trial.depthM.midspan,
+            cost: trial.cost.p50,
+            figures: {
+              depthM: ofTrial(i, ofOption(trial, 'depthM/midspan')),
+              cost: ofTrial(i, ofOption(trial, 'cost/p50')),
+            },
+          })),
         );
         if (!own || points.length < 3) {
           return h('p', { class: 'prose' }, fewDepths(points, own?.depthM.midspan ?? null));

@@ -10,7 +10,8 @@ import { askedWords, formsTable, unsizedWords } from './formsTable.ts';
 import type { StudyCells } from './studyCells.ts';
 
 const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartInput => ({
-  rows: spanRows(guide, formIds),
+  rows: spanRows(guide, formIds, true),
+  askedFigure: 'site/mainSpanM',
   askedM: guide.span,
   askedWords: `${fixed(guide.span, 0)} m asked: ${fixed(openingM, 0)} clear, plus the piers`,
   widthPx,

@@ -1,4 +1,5 @@
-import { figure, type FigureContext } from '../../lib/index.ts';
+import { figure, trialFigure, type AppraisedOption, type FigureContext } from '../../lib/index.ts';
+import { ofTrial, trialIn } from '../drawing/asked.ts';
 import { whereFrom, type Ask, type WhereFrom } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import type { StudyCells } from './studyCells.ts';
@@ -6,6 +7,9 @@ import type { StudyCells } from './studyCells.ts';
 /** Where figures are shown, by the beginning of their path; the first that fits. */
 const stations: readonly (readonly [path: RegExp, station: string])[] = [
   [/^brief\/(?:obstacles|waters|crossing\/ground)\b/u, '1+030'],
+  [/^depths\//u, '4+020'],
+  [/^(?:windows\/[^/]+\/(?:span|usual)|built|site\/mainSpanM)\b/u, '2+010'],
+  [/^site\/deck\/(?:w|ultimateW)idthM$/u, '1+040'],
   [/^brief\/(?:deck|groundStretches|surfacingM)\b/u, '1+040'],
   [/^brief\//u, '1+010'],
   [/^site\//u, '1+020'],
@@ -35,11 +39,24 @@ export function studyWhereFrom(graph: Graph, cells: StudyCells, sheet: HTMLEleme
   const where = whereFrom(sheet, stationOf);
   let age: FigureContext | undefined;
   let ask: Ask | null = null;
+  /** The reference at other depths, worked out beside the appraisal. */
+  let trials: readonly AppraisedOption[] = [];
+  const ofTrials = (context: FigureContext, asked: string) => {
+    const place = trialIn(asked);
+    if (place === null) return figure(context, asked);
+    const trial = trials[place.index];
+    if (trial === undefined)
+      throw new RangeError(`path: expected one of ${trials.length} trials, received '${asked}'`);
+    return trialFigure(context, trial, ofTrial(place.index, '').slice(0, -1), place.path);
+  };
+  const stopTrials = graph.watch(cells.byDepth, (state) => {
+    if (state.state === 'ready') trials = state.value;
+  });
   const stop = graph.view({ study: cells.asked, appraisal: cells.appraisal }, (state) => {
     if ('value' in state && state.value !== age) {
       const context = state.value;
       age = context;
-      ask = (path) => figure(context, path);
+      ask = (path) => ofTrials(context, path);
     }
     where.set(ask, state.state === 'pending');
   });
@@ -47,6 +64,7 @@ export function studyWhereFrom(graph: Graph, cells: StudyCells, sheet: HTMLEleme
     set: where.set,
     end() {
       stop();
+      stopTrials();
       where.end();
     },
   };

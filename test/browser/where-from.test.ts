@@ -67,6 +67,34 @@ describe('where from?', () => {
     );
   });
 
+  it('the overall width of the deck, the range of a form and the cost at a tried depth answer in their cells', async () => {
+    const deck = cell(page, '1+040');
+    await deck.locator('.walk button').scrollIntoViewIfNeeded();
+    await figure(page, '1+040', 'site/deck/widthM').click();
+    expect(await deck.locator('.answer-chain').textContent()).toContain('sum of the strips');
+    const span = cell(page, '2+010');
+    await span.scrollIntoViewIfNeeded();
+    await span.locator('summary').first().click();
+    await span.locator('td[data-figure="windows/composite-i/usual/most"]').click();
+    expect(await span.locator('.answer-chain').textContent()).toContain('most usual span of');
+    await span.locator('summary').first().click();
+    const depths = cell(page, '4+020');
+    await depths.scrollIntoViewIfNeeded();
+    await depths.locator('summary').first().click();
+    const cost = depths.locator('tbody tr').first().locator('td');
+    await cost.click();
+    const words = await cost.textContent();
+    const root = depths.locator('.chain tr').first();
+    expect(await root.getAttribute('data-path')).toMatch(/^depths\/0\/options\/\d+\/cost\/p50$/u);
+    expect(await root.textContent()).toContain(`${Number(words).toPrecision(2)} M€`);
+    const deckPart = depths
+      .locator('.chain tr[data-path^="depths/0/"][data-path$="/parts/deck/p50"]')
+      .first();
+    await deckPart.click();
+    expect(await depths.locator('.chain tr[data-path*="/lines/"]').count()).toBeGreaterThan(0);
+    await depths.locator('summary').first().click();
+  });
+
   it('keys alone walk the figures of a cell, ask one, walk its chain and come back', async () => {
     const ranking = cell(page, '10+010');
     await ranking.locator('.pushed').focus();

@@ -1,5 +1,6 @@
 import { beforeAll, describe, expect, it } from 'vitest';
-import { figure, type Context } from '../../lib/explain/index.ts';
+import { figure, rebuilt, type Context } from '../../lib/explain/index.ts';
+import { CROSSFALL, formFacts, formIds, guide } from '../../lib/index.ts';
 import { checkBars, checkTable } from '../../notebooks/charts/checkBars.ts';
 import { costByPart, partTable } from '../../notebooks/charts/costByPart.ts';
 import { costIntervals, costTable } from '../../notebooks/charts/costIntervals.ts';
@@ -7,15 +8,19 @@ import { oddsMatrix, oddsTable } from '../../notebooks/charts/oddsMatrix.ts';
 import { quantityMarks, quantityTable } from '../../notebooks/charts/quantityMarks.ts';
 import { rangePanels, rangeTable } from '../../notebooks/charts/rangePanels.ts';
 import { ranking } from '../../notebooks/charts/ranking.ts';
+import { spanChart, spanTable, type SpanChartInput } from '../../notebooks/charts/spanChart.ts';
+import { spanRows } from '../../notebooks/charts/spanRows.ts';
 import { tablePiece } from '../../notebooks/charts/table.ts';
 import { tradeOffs, tradeOffTable, type Measure } from '../../notebooks/charts/tradeOffs.ts';
 import { ofOption, pathsOf } from '../../notebooks/drawing/asked.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
+import { deckStrips } from '../../notebooks/drawing/deckStrips.ts';
 import { ladder } from '../../notebooks/drawing/ladder.ts';
 import type { Piece } from '../../notebooks/drawing/piece.ts';
 import { section } from '../../notebooks/drawing/section.ts';
 import { mainDesign, mainDesignPath, sectionRow } from '../../notebooks/drawing/sectionRow.ts';
 import { stack } from '../../notebooks/drawing/stack.ts';
+import { stripChain } from '../../notebooks/drawing/stripChain.ts';
 import { elements } from '../drawings/golden.ts';
 import { example, otherwise } from './contexts.ts';
 
@@ -41,6 +46,24 @@ function drawn({ study, appraisal }: Context): Readonly<Record<string, Piece>> {
     figures: (option) => ofOption(option, 'months/p50'),
   };
   const measures = [months];
+  const askedM = Number(formFacts(site)['mainSpanM']);
+  const spans: SpanChartInput = {
+    rows: spanRows(guide({ spanM: askedM, widthM: site.deck.widthM, lengthM: site.lengthM }), formIds, true),
+    askedM,
+    askedWords: `${askedM} m asked`,
+    askedFigure: 'site/mainSpanM',
+    widthPx: 1224,
+  };
+  const { deck, surfacingM } = study.brief;
+  const overall = (ultimate: boolean): Piece =>
+    stripChain({
+      edges: [0, 400],
+      leaders: [],
+      wordsPx: 40,
+      overallM: deck.reduce((sum, strip) => sum + (ultimate ? strip.ultimateWidthM : strip.widthM), 0),
+      marginPx: 20,
+      figure: ultimate ? 'site/deck/ultimateWidthM' : 'site/deck/widthM',
+    });
   const odds = { ...wide, unseparated: study.books.unseparated };
   return {
     'crossing with the first option': crossing({ site, option: first, obstacles, widthPx: 980 }),
@@ -58,6 +81,17 @@ function drawn({ study, appraisal }: Context): Readonly<Record<string, Piece>> {
               ]),
       ),
     ),
+    'span chart': spanChart(spans),
+    'table of spans': tablePiece(spanTable(spans)),
+    'strips of the deck': deckStrips({
+      strips: deck,
+      surfacingM,
+      crossfall: CROSSFALL,
+      scale: 100,
+      marginPx: 20,
+    }),
+    'overall width of the deck': overall(false),
+    'overall width in the ultimate layout': overall(true),
     stack: stack(wide),
     'stack on a hand-held screen': stack({ ...shared, widthPx: 358 }),
     ranking: ranking(shared),
@@ -103,8 +137,9 @@ const agrees = (
   value: number,
   { value: shown, half }: { value: number; half: number },
   path: string,
+  isPerCent: boolean,
 ): boolean =>
-  (path.startsWith('standing/') ? [0.01] : [1, 1e3, 1e6]).some((unit) => {
+  (path.startsWith('standing/') || isPerCent ? [0.01] : [1, 1e3, 1e6]).some((unit) => {
     const room = path.startsWith('standing/') ? 2.5 : half;
     return Math.abs(Math.abs(value / unit) - Math.abs(shown)) <= room * 1.0001 + 1e-9;
   });
@@ -134,6 +169,23 @@ describe.each([
     expect(count).toBeGreaterThan(200);
   });
 
+  it('rebuilt(path) is what is printed wherever its formula is closed', () => {
+    const paths = new Set(
+      Object.values(pieces).flatMap((piece) => printed(piece).flatMap((one) => one.paths)),
+    );
+    let closed = 0;
+    for (const path of paths) {
+      const { value } = figure(context, path);
+      const again = rebuilt(context, path);
+      if (typeof value !== 'number' || again === undefined) continue;
+      closed += 1;
+      expect(Math.abs(again - value), path).toBeLessThanOrEqual(1e-9 * Math.max(1, Math.abs(value)));
+    }
+    expect(closed).toBeGreaterThan(50);
+    for (const path of ['site/mainSpanM', 'site/deck/widthM', 'site/deck/ultimateWidthM'])
+      expect(paths).toContain(path);
+  });
+
   it('figure(path) holds the number that is printed', () => {
     const wrong: string[] = [];
     let compared = 0;
@@ -148,7 +200,8 @@ describe.each([
           const number = numbers[i];
           if (typeof value !== 'number' || number === undefined) return;
           compared += 1;
-          if (!agrees(value, number, path)) wrong.push(`${name}: '${words}' is ${path}, ${value}`);
+          if (!agrees(value, number, path, path === 'practice/site/crossfall'))
+            wrong.push(`${name}: '${words}' is ${path}, ${value}`);
         });
       }
     }

@@ -152,6 +152,7 @@ export function stripChainFields(
         wordsPx: tiers * TIER_PX + 4,
         overallM: widths.reduce((sum, width) => sum + width, 0),
         marginPx: DECK_MARGIN_PX,
+        figure: layout === 'ultimate' ? 'site/deck/ultimateWidthM' : 'site/deck/widthM',
         ...(layout === 'ultimate' && { what: 'ultimate' }),
       });
       drawn.replaceChildren(toDom(chain, document));
