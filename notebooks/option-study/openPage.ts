@@ -252,7 +252,7 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
       costSection(page, graph, store, cells),
       programmeSection(page, cells),
       tradeOffSection(page, cells),
-      rankingSection(page, cells),
+      rankingSection(page, graph, store, cells),
       decisionSection(page, graph, store, cells, today),
     ],
   });

@@ -5,7 +5,9 @@ import { optionTitle } from '../drawing/optionWords.ts';
 import { listed } from '../format.ts';
 import { formLooks } from '../forms/formLook.ts';
 import { h, type HtmlChild } from '../html.ts';
-import { pushed, workedFigure, type LineSection, type Sheet } from '../page/index.ts';
+import { pushed, workedFigure, type LineSection, type Sheet, type StudyStore } from '../page/index.ts';
+import type { Graph } from '../reactive/index.ts';
+import { priorityTable } from './priorities/priorityTable.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
 
@@ -94,7 +96,7 @@ function warningsTable(options: readonly AppraisedOption[]): HTMLElement {
 }
 
 /** Section 10: order under the budget, and the rulings behind it. */
-export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
+export function rankingSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
   const { appraisal, reference, brief } = cells;
   const finding = page.live({ appraisal }, (v) => v.appraisal.standing.because[0] ?? '');
   return page.section(10, 'Ranking under the budget', finding, [
@@ -120,6 +122,27 @@ export function rankingSection(page: Sheet, cells: StudyCells): LineSection {
           const of = option === undefined ? '' : `Option ${String(option)}, `;
           return h('p', {}, `${of}${formLooks[form].short} dropped: ${because.join('; ')}.`);
         }),
+      ],
+    }),
+    page.cell({
+      station: '10+015',
+      title: 'Priorities',
+      shows: { priorities: store.slices.priorities },
+      body: [
+        h(
+          'p',
+          {},
+          'Stated priorities. The ranking above is by cost under the rules and does not use them; they are kept with the study for whoever decides.',
+        ),
+        priorityTable(graph, store),
+      ],
+      notes: [
+        h(
+          'p',
+          {},
+          'Weights are to each other as they stand: 2 counts twice 1. ',
+          h('span', { class: 'on-screen' }, 'An emptied name takes its priority out.'),
+        ),
       ],
     }),
     page.cell({
