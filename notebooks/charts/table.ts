@@ -3,8 +3,8 @@ import { dataFigure } from '../drawing/asked.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el } from '../drawing/piece.ts';
 
-/** Text of a cell, or text with the figure of the study it prints. */
-export type TableCell = string | { readonly text: string; readonly figure: Asked };
+/** Text of a cell, or text with the figure of the study it prints where that can be asked. */
+export type TableCell = string | { readonly text: string; readonly figure?: Asked };
 
 /** The table behind a chart: every figure it shows, as text. */
 export interface Table {

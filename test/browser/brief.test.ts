@@ -228,7 +228,7 @@ describe('an entry', () => {
   const dotted = (): Promise<number> => page.locator('svg.stations path[stroke-dasharray="1.4 3.2"]').count();
 
   it('that is refused holds what hangs on it, in marks and in words, and nothing else, until it is mended', async () => {
-    const asTyped = ['1+010', '1+030', '1+040', '2+020', '10+030'];
+    const asTyped = ['1+010', '1+030', '1+040', '2+020', '10+015', '10+030'];
     const all = await page.locator('.cell').evaluateAll((cells) => cells.map(({ id }) => id));
     expect(await dotted()).toBe(0);
     await type(page, 'obstacle 2, to, m', '1300');

@@ -81,7 +81,7 @@ describe('where from?', () => {
     const depths = cell(page, '4+020');
     await depths.scrollIntoViewIfNeeded();
     await depths.locator('summary').first().click();
-    const cost = depths.locator('tbody tr').first().locator('td');
+    const cost = depths.locator('tbody tr').first().locator('td').first();
     await cost.click();
     const words = await cost.textContent();
     const root = depths.locator('.chain tr').first();

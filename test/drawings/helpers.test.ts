@@ -321,7 +321,7 @@ it('depthCurve({points}) and its table name no cost finer than two figures', () 
     expect(ticks).toEqual(ticks.map((tick) => Number(tick.toPrecision(2))));
     expect(new Set(ticks).size).toBe(ticks.length);
     const { rows } = depthTable(input);
-    expect(rows[0]).toEqual(['2.00', '6.1', '0.0']);
+    expect(rows[0]).toEqual([{ text: '2.00' }, { text: '6.1' }, '0.0']);
     expect(rows.at(-1)![2]).toBe((100 * spread).toFixed(1));
   }
 });

@@ -75,7 +75,8 @@ describe('trialFigure(context, trial, under, path)', () => {
     });
     expect(rows[0]).toEqual([
       { text: '2.40', figure: figures.depthM },
-      { text: '6.20', figure: figures.cost },
+      { text: '6.2', figure: figures.cost },
+      '0.0',
     ]);
   });
 });
