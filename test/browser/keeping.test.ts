@@ -33,9 +33,16 @@ const says = (of: Page, words: string): Promise<unknown> =>
   of.waitForFunction((text) => document.querySelector('.bar .state')?.textContent.includes(text), words, {
     polling: 100,
   });
-/** Waits until every change has been saved. */
+/** Waits until every change to the study on the page has been saved; what another was left with waits until it is opened. */
 const allSaved = (of: Page): Promise<unknown> =>
-  of.waitForFunction(() => Object.keys(localStorage).length === 0, undefined, { polling: 100 });
+  of.waitForFunction(
+    () => {
+      const id = new URLSearchParams(location.search).get('study');
+      return id !== null && localStorage.getItem(`spanledger.unsaved.${id}`) === null;
+    },
+    undefined,
+    { polling: 100 },
+  );
 /** Waits until the page may be changed. */
 const mayChange = (of: Page): Promise<unknown> =>
   of.waitForFunction(() => !document.querySelector('.sheet')!.classList.contains('read-only'), undefined, {

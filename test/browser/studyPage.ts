@@ -6,7 +6,7 @@ import { openSite, type Heard, type Site } from './site.ts';
 /** A cell says only after 150 ms that it waits: what is seen before that may be of the study before. */
 const SAYS_SO_MS = 250;
 
-/** Waits until the stack stands and nothing is being worked out. */
+/** Waits until the stack stands and nothing is being worked out: cells are done, or held where an entry is refused. */
 export async function settled(page: Page): Promise<void> {
   await page.waitForSelector('[data-option]', { timeout: 60_000 });
   await page.waitForTimeout(SAYS_SO_MS);
@@ -14,7 +14,9 @@ export async function settled(page: Page): Promise<void> {
     // Once all has been drawn, what is off the screen is not laid out any more.
     () =>
       document.querySelector('.skips') !== null &&
-      [...document.querySelectorAll('.cell')].every((cell) => cell.getAttribute('data-state') === 'done'),
+      [...document.querySelectorAll('.cell')].every((cell) =>
+        ['done', 'held'].includes(cell.getAttribute('data-state')!),
+      ),
     undefined,
     { timeout: 60_000, polling: 100 },
   );
