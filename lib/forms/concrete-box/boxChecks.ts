@@ -34,7 +34,7 @@ export function boxChecks(model: BoxModel, box: SizedBox, reactions: readonly Su
     check(
       'service-tension',
       model.standardId === 'lm1'
-        ? 'concrete round the tendons stays compressed in frequent service'
+        ? 'frequent service: compressed round the tendons, faces uncracked'
         : 'tension of the concrete in service',
       service.needKN,
       service.forceKN,

@@ -1,8 +1,9 @@
-import { concrete, type Concrete, type TrafficEnvelope } from '../../actions/index.ts';
+import type { TrafficEnvelope } from '../../actions/index.ts';
 import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { Tendons } from './findTendons.ts';
+import { youngTensionMPa, type CastOf } from './freshTension.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 
 /** Greatest stress of the concrete over its limit, with the stress, MPa. */
@@ -22,11 +23,10 @@ export interface Compressions {
 }
 
 /** What stresses ask to know of a deck and of its tendons. */
-export type StressModel = Pick<BoxModel, 'standardId' | 'concrete' | 'superimposed' | 'pierShare'> & {
-  /** Lightweight concrete of a part of it. */
-  readonly light?: Concrete | null;
-  readonly traffic: { readonly most: Pick<TrafficEnvelope, 'momentMaxKNm' | 'momentMinKNm'> };
-};
+export type StressModel = CastOf &
+  Pick<BoxModel, 'superimposed' | 'pierShare'> & {
+    readonly traffic: { readonly most: Pick<TrafficEnvelope, 'momentMaxKNm' | 'momentMinKNm'> };
+  };
 export type StressingTendons = Pick<
   Tendons,
   'share' | 'parasiticM' | 'eccentricityM' | 'forceKN' | 'initialKN' | 'straightKN' | 'straightInitialKN'
@@ -51,8 +51,7 @@ export function boxCompressions(
     transfer: transfer * strengthAtTransfer * fck,
   };
   const nil: StressUse = { use: 0, stressMPa: 0, limitMPa: limits.total };
-  const weaker = model.light ? model.light.fctmMPa / model.concrete.fctmMPa : 1;
-  const young = weaker * concrete(model.standardId, strengthAtTransfer * fck).fctmMPa;
+  const young = youngTensionMPa(model);
   const out = { pierSoffit: nil, spanSoffit: nil, top: nil, freshTension: { ...nil, limitMPa: young } };
   const note = (place: keyof typeof out, stressKPa: number, limitMPa: number): void => {
     const use = stressKPa / 1e3 / limitMPa;

@@ -13,7 +13,7 @@ export const boxCheckFigures: readonly Descriptor[] = [
   ...check(
     'service-tension',
     [
-      'force with which P / A + P e / W balances the moments in service, W with what works of the flanges',
+      'force with which P / A + P e / W balances the moments in service, round the tendons and, less the tension allowed there, at the faces, W with what works of the flanges',
       ...moments,
       ...working,
       'areaM2',
@@ -26,7 +26,7 @@ export const boxCheckFigures: readonly Descriptor[] = [
       'tendonForceKN',
       'data/concrete-box/prestressSpread/:standard',
     ],
-    'EN 1992-2 7.3.1, AASHTO LRFD 5.9.2 (from memory)',
+    'EN 1992-2 7.3.1, EN 1992-1-1 7.1(2), AASHTO LRFD 5.9.2 (from memory)',
   ),
   ...check(
     'bending-spans',

@@ -1,7 +1,8 @@
 import type { OwnWeight } from './boxLoads.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
-import { leastForce, type Drape, type DrapeNeed } from './leastForce.ts';
+import { mayBeStressed } from './freshTension.ts';
+import { leastForce, type Drape, type DrapeAsked } from './leastForce.ts';
 import type { LaunchedDeck } from './launchedDeck.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { serviceNeed } from './serviceNeed.ts';
@@ -75,7 +76,14 @@ export function findTendons(
   const stress = tendonStress(model, sagM, Math.min(axialMPa, model.concrete.fckMPa / 2));
   const perStrandKN = stress.lastingMPa * model.strandM2 * 1e3;
 
+  const initialKN = stress.initialMPa * model.strandM2 * 1e3;
+  const straightInitialKN = straightStrands * model.strandM2 * straight.initialMPa * 1e3;
+  const strandsFor = (forceKN: number): number => {
+    const wanted = Math.ceil(forceKN / perStrandKN / webs - 1e-6);
+    return Math.min(most, Math.max(boxData.tendons.sizes[0]!.strands, wanted));
+  };
   const service = serviceNeed(model, sections, own, group, straightKN);
+  const mayStress = mayBeStressed(model, sections, own, straightInitialKN);
   // A deeper compression zone asks for more force and that deepens it again: half the way is steady.
   const steadiedKN = before ? (before.forceKN + (before.steadiedKN || before.forceKN)) / 2 : 0;
   const straightM2 = straightStrands * model.strandM2;
@@ -83,12 +91,15 @@ export function findTendons(
     if (before && way !== before.way) return [];
     const line = tendonLine(model, sections, group, shapes);
     const ultimate = ultimateNeed(model, sections, own, stress.lastingMPa, straightM2, steadiedKN, shapes);
-    const need: DrapeNeed = (drape, enough) => {
-      const at = line(drape);
-      const forService = service(at, enough);
-      return forService >= enough ? forService : Math.max(forService, ultimate(at, enough));
+    const asked: DrapeAsked = {
+      need(drape, enough) {
+        const at = line(drape);
+        const forService = service(at, enough);
+        return forService >= enough ? forService : Math.max(forService, ultimate(at, enough));
+      },
+      bears: (drape, forceKN) => mayStress(line(drape), strandsFor(forceKN) * webs * initialKN),
     };
-    const { drape, forceKN } = leastForce(need, spansM.length, before?.drape ?? null);
+    const { drape, forceKN } = leastForce(asked, spansM.length, before?.drape ?? null);
     return [{ way, drape, forceKN, meanShare: shapes.meanShare, line }];
   });
   const found = tried.reduce((a, b) => (b.forceKN * b.meanShare < a.forceKN * a.meanShare ? b : a));
@@ -103,8 +114,7 @@ export function findTendons(
       parasiticM,
       share,
     });
-  const wanted = Math.ceil(found.forceKN / perStrandKN / webs - 1e-6);
-  let strandsPerWeb = Math.min(most, Math.max(boxData.tendons.sizes[0]!.strands, wanted));
+  let strandsPerWeb = strandsFor(found.forceKN);
   let [sag, hog] = bend(strandsPerWeb);
   // The slab over the piers may still have to grow: the first pass does not answer for it with strands.
   while (before && Math.max(sag.use, hog.use) > 1 && strandsPerWeb < most) {
@@ -121,10 +131,10 @@ export function findTendons(
     strandsPerWeb,
     stress,
     forceKN: strands * perStrandKN,
-    initialKN: strands * model.strandM2 * stress.initialMPa * 1e3,
+    initialKN: strands * initialKN,
     straightStrands,
     straightKN,
-    straightInitialKN: straightStrands * model.strandM2 * straight.initialMPa * 1e3,
+    straightInitialKN,
     drape: found.drape,
     steadiedKN,
     depthM,

@@ -1,16 +1,23 @@
+import type { TrafficEnvelope } from '../../actions/index.ts';
+import type { Effects } from '../../mechanics/index.ts';
 import { boxData } from './boxData.ts';
-import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
-import type { BoxTraffic } from './boxTraffic.ts';
+import type { CastOf } from './freshTension.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
+import { serviceLimits } from './serviceLimits.ts';
 import type { TendonGroup } from './tendonGroup.ts';
 import type { TendonLine } from './tendonLine.ts';
 
+/** Of the effects of a load service asks for the moments. */
+type Moments = Pick<Effects, 'momentKNm'>;
+
 /** What service asks to know of a deck. */
-export type ServiceModel = Pick<BoxModel, 'standardId' | 'concrete' | 'superimposed' | 'archedKNm'> & {
-  readonly task: Pick<BoxModel['task'], 'depthM'>;
-  readonly traffic: Pick<BoxTraffic, 'service'>;
-};
+export type ServiceModel = CastOf &
+  Pick<BoxModel, 'archedKNm'> & {
+    readonly task: Pick<BoxModel['task'], 'depthM'>;
+    readonly superimposed: Moments;
+    readonly traffic: { readonly service: Pick<TrafficEnvelope, 'momentMaxKNm' | 'momentMinKNm'> };
+  };
 
 /** Section properties along a deck, and the inertia by which its free curvature is judged. */
 export type ServiceSections = Pick<
@@ -27,20 +34,18 @@ export type LineNeed = (line: TendonLine, enough?: number) => number;
 export function serviceNeed(
   model: ServiceModel,
   sections: ServiceSections,
-  own: Pick<OwnWeight, 'effects'>,
+  own: { readonly effects: Moments },
   group: Pick<TendonGroup, 'heightM'>,
   straightKN: number,
   gradient: Omit<typeof boxData.gradient, 'source'> = boxData.gradient,
 ): LineNeed {
   const { service } = model.traffic;
   const spread = boxData.prestressSpread[model.standardId];
-  const tension = boxData.serviceTensionMPa[model.standardId] * 1e3;
   // Stiffness times free curvature of the gradient with traffic.
   const warm =
     (gradient.withTraffic * gradient.expansion1PerK * model.concrete.ecmMPa * 1e3 * sections.span.inertiaM4) /
     model.task.depthM;
-  const around =
-    model.standardId === 'lm1' ? group.heightM / 2 + boxData.decompressedAroundDuctM.value : Infinity;
+  const limits = serviceLimits(model, group.heightM);
   const n = sections.areaM2.length;
   const sagging = new Float64Array(n);
   const hogging = new Float64Array(n);
@@ -65,18 +70,20 @@ export function serviceNeed(
       const area = sections.areaM2[i]!;
       const inertia = sections.inertiaM4[i]!;
       const e = eccentricityM[i]!;
-      const straight = (spread * straightKN) / area + tension;
-      const down = (sections.lowLag[i]! * Math.min(sections.lowM[i]!, e + around)) / inertia;
-      const up = (sections.topLag[i]! * Math.min(sections.topM[i]!, around - e)) / inertia;
       const bend = share[i]! * e - parasiticM[i]!;
       const axial = share[i]! / area;
-      const lowNeed = (sagging[i]! * down - straight) / (spread * (axial + bend * down));
-      const highNeed = (-hogging[i]! * up - straight) / (spread * (axial - bend * up));
-      most = Math.max(
-        most,
-        forceFor(lowNeed, sagging[i]! * down > straight),
-        forceFor(highNeed, -hogging[i]! * up > straight),
-      );
+      for (const { aroundM, tensionKPa } of limits) {
+        const straight = (spread * straightKN) / area + tensionKPa;
+        const down = (sections.lowLag[i]! * Math.min(sections.lowM[i]!, e + aroundM)) / inertia;
+        const up = (sections.topLag[i]! * Math.min(sections.topM[i]!, aroundM - e)) / inertia;
+        const lowNeed = (sagging[i]! * down - straight) / (spread * (axial + bend * down));
+        const highNeed = (-hogging[i]! * up - straight) / (spread * (axial - bend * up));
+        most = Math.max(
+          most,
+          forceFor(lowNeed, sagging[i]! * down > straight),
+          forceFor(highNeed, -hogging[i]! * up > straight),
+        );
+      }
       if (most >= enough) {
         first = i;
         return most;

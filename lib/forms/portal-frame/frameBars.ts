@@ -1,6 +1,7 @@
 import { materials } from '../../actions/index.ts';
 import { barDesignMPa } from '../common/bars.ts';
 import { slabData } from '../common/slab/slabData.ts';
+import { boxData } from '../concrete-box/boxData.ts';
 import { bendingCapacity, compressionDepth, strandDesignMPa } from '../concrete-box/bendingCapacity.ts';
 import { crackWidthMm, serviceBars } from '../slab/crackedSection.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
@@ -55,7 +56,7 @@ interface Strip {
 
 /**
  * Bars of both faces of deck and walls: at the ultimate limit with the thrust that comes with each moment, and in service
- * for stress and cracks where nothing is prestressed; the smallest size that fits.
+ * for stress and cracks where nothing is prestressed, or the face cracks beside its tendons; the smallest size that fits.
  */
 export function frameBars(
   model: FrameModel,
@@ -95,8 +96,13 @@ function faceBars(
   const at = (list: Combination[], node: number): Combined[] =>
     list.map((combination) => worstMoment(combination, node, sign));
   const ult = nodes.map((node) => at(ultimate, node));
-  const chr = stressed ? [] : nodes.map((node) => at(characteristic, node));
-  const frq = stressed ? [] : nodes.map((node) => at(frequent, node));
+  const inService = (list: Combination[], node: number): Combined[] =>
+    stressed
+      ? at(list, node).map((loads) => withTendons(model, stressed, loads, node, sign))
+      : at(list, node);
+  const frq = nodes.map((node) => inService(frequent, node));
+  const chr = nodes.map((node) => inService(characteristic, node));
+  const mayCrack = nodes.map((node, i) => !stressed || cracks(model, frq[i]!, node, sign));
   let found: FaceBars | null = null;
   for (const barM of bars.sizesM) {
     const needM2 = new Float64Array(nodes.length);
@@ -106,7 +112,7 @@ function faceBars(
       const strip = stripOf(model, node, sign, barM, inDeck);
       for (const loads of ult[i]!)
         needM2[i] = Math.max(needM2[i]!, ultimateBars(model, strip, loads, node, sign, stressed));
-      if (!stressed) needM2[i] = crackBars(model, strip, barM, frq[i]!, chr[i]!, needM2[i]!);
+      if (mayCrack[i]!) needM2[i] = crackBars(model, strip, barM, frq[i]!, chr[i]!, needM2[i]!);
       const here = needM2[i]! / fits(strip, barM);
       if (here > use) {
         use = here;
@@ -164,6 +170,40 @@ function strandsAt(
   if (!tendons) return { strandM2: 0, strandDepthM: 0 };
   const level = tendons.levelM[node]!;
   return { strandM2: tendons.areaM2, strandDepthM: sign > 0 ? level : depthM - level };
+}
+
+/** A combination of service with what the lasting force of the tendons, on its low side, does to the section. */
+function withTendons(
+  { standardId, shape }: FrameModel,
+  { forceKN, levelM }: FrameTendons,
+  { momentKNm, thrustKN }: Combined,
+  node: number,
+  sign: 1 | -1,
+): Combined {
+  const lastingKN = boxData.prestressSpread[standardId] * forceKN;
+  const eccentricityM = levelM[node]! - shape.sections[node]!.outerM;
+  return {
+    momentKNm: momentKNm - sign * lastingKN * eccentricityM,
+    thrustKN: thrustKN + lastingKN,
+  };
+}
+
+/**
+ * Whether a face beside tendons cracks in frequent service (EN 1992-1-1 7.1(2)). Under AASHTO the tendons are found so that
+ * it does not.
+ */
+function cracks(
+  { standardId, shape, concrete }: FrameModel,
+  frequent: readonly Combined[],
+  node: number,
+  sign: 1 | -1,
+): boolean {
+  if (standardId !== 'lm1') return false;
+  const { areaM2, inertiaM4, outerM, depthM } = shape.sections[node]!;
+  const farM = sign > 0 ? depthM - outerM : outerM;
+  return frequent.some(
+    ({ momentKNm, thrustKN }) => (momentKNm * farM) / inertiaM4 - thrustKN / areaM2 > concrete.fctmMPa * 1e3,
+  );
 }
 
 const pressedFace = ({ pressedM, depthM }: Strip) => ({ widthM: pressedM, flangeM: depthM, websM: pressedM });

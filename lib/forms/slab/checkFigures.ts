@@ -38,7 +38,7 @@ export const slabBridgeChecks: readonly Descriptor[] = [
   ...check(
     'service-tension',
     [
-      'force with which P / A + P e / W balances the moments in service',
+      'force with which P / A + P e / W balances the moments in service, round the tendons and, less the tension allowed there, at the faces',
       ...moments,
       'areaM2',
       'inertiaM4',
@@ -46,7 +46,7 @@ export const slabBridgeChecks: readonly Descriptor[] = [
       'data/concrete-box/serviceTensionMPa/:standard',
     ],
     ['lasting force of the tendons', 'tendonForceKN'],
-    'EN 1992-2 7.3.1, AASHTO LRFD 5.9.2 (from memory)',
+    'EN 1992-2 7.3.1, EN 1992-1-1 7.1(2), AASHTO LRFD 5.9.2 (from memory)',
   ),
   ...check(
     'tendon-room',

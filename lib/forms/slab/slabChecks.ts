@@ -47,7 +47,7 @@ export function slabChecks(model: SlabModel, slab: SizedSlab): Check[] {
       check(
         'service-tension',
         model.standardId === 'lm1'
-          ? 'concrete round the tendons stays compressed in frequent service'
+          ? 'frequent service: compressed round the tendons, faces uncracked'
           : 'tension of the concrete in service',
         tendons.needKN,
         tendons.forceKN,
