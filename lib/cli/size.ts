@@ -9,7 +9,7 @@ import { finish } from '../appraise/work.ts';
 import { cannotCarry, formModule } from '../forms/index.ts';
 import type { Design } from '../model/index.ts';
 import { meanRates, ratesFor } from '../price/index.ts';
-import { perM2, splitQuantities } from '../takeoff/index.ts';
+import { itemOf, perM2, splitQuantities } from '../takeoff/index.ts';
 import { refuse } from './refusal.ts';
 import { rounded } from './rounded.ts';
 import { jsonText, type Said } from './said.ts';
@@ -125,7 +125,7 @@ function limitOf(asked: Asked, say: (line: string) => void): Said {
 }
 
 /**
- * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities and checks of one unit, as JSON.
+ * `size --form ID --spans 60,80,60 --width 12 --lanes 3 [--depth 3.1] ...`: quantities, take-off by part and checks of one unit, as JSON.
  * `--skew` is the skew of the supports from square, degrees, either way; spans are those along the road.
  * Without a depth the one of least cost in the published band is taken, beyond it where none inside carries. What cannot
  * carry is refused with the checks that stand in the way. Concrete boxes read `--box-width`
@@ -154,6 +154,14 @@ export function sizeCommand(argv: readonly string[], say: (line: string) => void
         quantities: superstructure,
         perM2: perM2(superstructure, deckAreaM2),
         supports,
+        lines: design.lines.map(({ part, item, what, quantity, how }) => ({
+          part,
+          item,
+          what,
+          quantity,
+          unit: itemOf(item).unit,
+          how,
+        })),
         checks: design.checks.map(({ id, label, utilisation }) => ({ id, label, utilisation })),
         limitingCheck: design.limitingCheck.id,
         ownWeightShare: design.ownWeightShare,

@@ -7,6 +7,7 @@ interface Sized {
   readonly deckAreaM2: number;
   readonly perM2: Record<string, number>;
   readonly quantities: Record<string, number>;
+  readonly lines: { item: string; what: string; quantity: number; unit: string; how: string }[];
   readonly checks: { id: string; utilisation: number }[];
   readonly limitingCheck: string;
   readonly depthM: { support: number; midspan: number };
@@ -25,6 +26,18 @@ describe('size', () => {
     expect(sized.quantities['structuralSteelKg']! / 2400).toBeCloseTo(sized.perM2['structuralSteelKg']!, 2);
     const governing = sized.checks.find((check) => check.id === sized.limitingCheck)!;
     expect(governing.utilisation).toBe(Math.max(...sized.checks.map((check) => check.utilisation)));
+  });
+
+  it('size(...) prints the take-off by part, which adds up to the quantities', () => {
+    const { lines, quantities } = size(
+      '--form composite-i --spans 60,80,60 --width 12 --lanes 3 --depth 3.1',
+    );
+    const sum = (item: string): number =>
+      lines.filter((line) => line.item === item).reduce((kg, { quantity }) => kg + quantity, 0);
+    expect(sum('plate-girder-steel')).toBeCloseTo(quantities['structuralSteelKg']!, -1);
+    expect(sum('reinforcement')).toBeCloseTo(quantities['reinforcementKg']!, -1);
+    expect(lines.map(({ what }) => what)).toContain('bottom flanges');
+    for (const { unit, how } of lines) expect(unit.length * how.length).toBeGreaterThan(0);
   });
 
   it('size(...) without a depth finds one inside the published band', () => {
