@@ -4,6 +4,7 @@ import { formModule, sizeableForms } from '../forms/index.ts';
 import type { DeckStrip, FormId, Problem, StandardId, UnitTask } from '../model/index.ts';
 import { standardIds } from '../model/index.ts';
 import { deckSpec } from '../site/index.ts';
+import { BARRIERS_M, LEAST_LANE_M, WIDEST_DECK_M } from './deckWidths.ts';
 import { needFlags, readFlags, type Flags } from './flags.ts';
 import { numberFlag } from './numberFlag.ts';
 import { refuse } from './refusal.ts';
@@ -31,10 +32,6 @@ const flagNames = [
 const SURFACING_M = 0.09;
 /** Published factors of skew decks end here. */
 const MOST_SKEW_DEG = 60;
-/** Barriers take what the carriageway leaves of the width, half on each side. */
-const BARRIERS_M = 1;
-/** No traffic lane is marked narrower, m (common practice, no source). */
-const LEAST_LANE_M = 2.5;
 
 function oneOf<T extends string>(
   name: string,
@@ -177,12 +174,13 @@ export function readTask(argv: readonly string[]): Asked {
   const spansM = spansOf(flags, problems);
   const metres = (name: string, most: number): number | undefined =>
     numberFlag(flags, name, { above: 0, most, unit: 'm' }, problems);
-  const widthM = metres('width', 60);
+  const widthM = metres('width', WIDEST_DECK_M);
   const lanes = numberFlag(flags, 'lanes', { above: 0, most: 16, whole: true, unit: 'lanes' }, problems);
   const depthM = metres('depth', DEEPEST_M);
   const haunch =
     numberFlag(flags, 'haunch', { above: 1, most: 4, unit: 'times the midspan depth' }, problems) ?? 1;
-  const carriagewayM = metres('carriageway', 60) ?? (widthM === undefined ? undefined : widthM - BARRIERS_M);
+  const carriagewayM =
+    metres('carriageway', WIDEST_DECK_M) ?? (widthM === undefined ? undefined : widthM - BARRIERS_M);
   const planRadiusM = metres('radius', 1e6) ?? Infinity;
   // Either way: + and - are mirror images.
   const skewDeg = Math.abs(

@@ -5,6 +5,11 @@ import { answer } from './run.ts';
 const run = (line: string) => answer(guideCommand, line);
 
 describe('guide on the command line', () => {
+  it('takes the narrowest deck that carries a lane: 2.5 m between two barriers of half a metre', () => {
+    expect(run('--span 30 --width 3.5').code).toBe(0);
+    expect(run('--span 30 --width 3.49').code).toBe(2);
+  });
+
   it('prints seventeen forms as JSON and leaves with 0', () => {
     const { code, out, err } = run('--span 120 --width 12 --length 400 --radius 1500');
     expect(err).toBe('');
@@ -32,6 +37,11 @@ describe('guide on the command line', () => {
   });
   it.each([
     ['--span -3', /span: expected a number above 0 m, received -3 m \(--span\)/],
+    [
+      '--span 100 --width 1',
+      /width: expected a number of at least 3\.5, at most 60 m, received 1 m \(--width\)/,
+    ],
+    ['--span 100 --width 61', /width: expected .*at most 60 m, received 61 m/],
     ['--span 100 --length 50', /length: expected at least the span of 100 m, received 50 m \(--length\)/],
   ])('%s leaves with 2 and says why on stderr', (line, message) => {
     const { code, out, err } = run(line);
