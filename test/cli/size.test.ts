@@ -159,17 +159,23 @@ describe('size', () => {
     expect(castIn.quantities['prestressKg']).toBeGreaterThan(size(line).quantities['prestressKg']!);
   });
 
-  it('size(concrete-box --skew) is the same either way, and heavier than square; 0 is square to the last digit', () => {
-    const line = '--form concrete-box --spans 35,45,35 --width 12 --lanes 3 --depth 2.1';
-    expect(size(`${line} --skew 0`)).toEqual(size(line));
-    expect(size(`${line} --skew -30`)).toEqual(size(`${line} --skew 30`));
-    const { quantities } = size(`${line} --skew 30`);
-    expect(quantities['reinforcementKg']).toBeGreaterThan(size(line).quantities['reinforcementKg']!);
-  });
+  it.each([
+    ['concrete-box --spans 35,45,35 --depth 2.1', 'reinforcementKg'],
+    ['truss --spans 80 --depth 1.5', 'structuralSteelKg'],
+    ['half-through --spans 30 --depth 1.2', 'structuralSteelKg'],
+  ])(
+    'size(%s --skew) is the same either way, and heavier than square; 0 is square to the last digit',
+    (unit, of) => {
+      const line = `--form ${unit} --width 12 --lanes 3`;
+      expect(size(`${line} --skew 0`)).toEqual(size(line));
+      expect(size(`${line} --skew -30`)).toEqual(size(`${line} --skew 30`));
+      expect(size(`${line} --skew 30`).quantities[of]).toBeGreaterThan(size(line).quantities[of]!);
+    },
+  );
 
   it.each([
     ['--form slab --skew 61', /skew: expected .* at most 60 degrees, received 61/],
-    ['--form truss --skew 20', /skew: expected a form that reads it: .*slab.*received truss/],
+    ['--form portal-frame --skew 20', /skew: expected a form that reads it: .*truss.*received portal-frame/],
   ])('size(%s) is refused', (line, told) => {
     expect(answer(sizeCommand, `${line} --spans 20 --width 12 --lanes 3`).err).toMatch(told);
   });

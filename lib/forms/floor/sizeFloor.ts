@@ -15,6 +15,7 @@ import { loadTrack } from '../../mechanics/index.ts';
 import type { Check, DeckSpec, StandardId } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
 import { designSlab, type SlabDesign } from '../common/slab/designSlab.ts';
+import { alongSkewM } from '../common/skewPlanes.ts';
 import { superimposedOn } from '../common/superimposed.ts';
 import { fatigueRange } from './fatigue.ts';
 import { floorBeam, type FloorBeam } from './floorBeam.ts';
@@ -32,6 +33,8 @@ export interface FloorCase {
   readonly depthM: number;
   /** True: stringers carry a slab that spans across the road. False: the slab spans from cross-girder to cross-girder. */
   readonly stringers: boolean;
+  /** Skew that cross-girders run at, degrees from square, 0 or more; square when absent. */
+  readonly skewDeg?: number;
   /** Design moment that frames of cross-girders and posts put into the cross-girders, kNm; 0 when absent. */
   readonly frameKNm?: number;
 }
@@ -39,6 +42,8 @@ export interface FloorCase {
 export interface Floor {
   readonly slab: SlabDesign;
   readonly crossGirder: FloorBeam;
+  /** Length of a cross-girder from plane to plane, m. */
+  readonly crossM: number;
   readonly stringer: FloorBeam | null;
   /** Positions across the deck, m; empty without stringers. */
   readonly stringerOffsetsM: readonly number[];
@@ -58,7 +63,8 @@ export const leastSteelM = 0.3;
 /**
  * Sizes slab, stringers and cross-girders of a floor as simple composite beams. Cross-girders take the standard's
  * vehicles over their influence triangle (one panel each way) and across the deck by their own bending line.
- * planesM 6 to 40, crossSpacingM 2 to 12.
+ * On a skew they carry the same loads over a length that is longer by 1 / cos: all moments grow by that. planesM 6 to 40,
+ * crossSpacingM 2 to 12, skewDeg below 90.
  */
 export function sizeFloor(floor: FloorCase): Floor {
   const standard = loadStandard(floor.standard);
@@ -83,7 +89,8 @@ export function sizeFloor(floor: FloorCase): Floor {
     count > 0 ? sizeStringer(floor, standard, slab, pitchM, stringerOffsetsM, yieldMPa, concreteMPa) : null;
   const stringersKgPerM = stringer === null ? 0 : stringer.massKgPerM * count;
   const cross = sizeCross(floor, standard, slab, slabKNm, stringersKgPerM, yieldMPa, concreteMPa);
-  const crossKgPerM = (cross.massKgPerM * floor.planesM) / floor.crossSpacingM;
+  const crossM = alongSkewM(floor.planesM, floor.skewDeg);
+  const crossKgPerM = (cross.massKgPerM * crossM) / floor.crossSpacingM;
   const steelKgPerM = crossKgPerM + stringersKgPerM;
   const checks = [
     ...slab.checks,
@@ -96,11 +103,12 @@ export function sizeFloor(floor: FloorCase): Floor {
   return {
     slab,
     crossGirder: cross,
+    crossM,
     stringer,
     stringerOffsetsM,
     steelKgPerM,
     paintM2PerM:
-      (cross.paintM2PerM * floor.planesM) / floor.crossSpacingM +
+      (cross.paintM2PerM * crossM) / floor.crossSpacingM +
       (stringer === null ? 0 : stringer.paintM2PerM * count),
     slabKNm,
     steelKNm: (steelKgPerM * 9.81) / 1000,
@@ -183,13 +191,16 @@ function sizeCross(
 ): FloorBeam {
   const { standard: id, deck, planesM: b, crossSpacingM: p } = floor;
   const { uls } = standard.factors;
+  const alongM = alongSkewM(b, floor.skewDeg);
+  const longer = alongM / b;
   const stations = [-p, 0, p];
   const triangle = [0, 1, 0];
   // A load in kN at y bends the middle by this many kNm, so the load that comes back is in kNm.
   const bending: CrossLine = { yM: [-b / 2, 0, b / 2], value: [0, b / 4, 0] };
   const load = trafficOnCrossLine(id, deck, bending, shortSpanWeigh(2 * p));
-  const traffic = trafficOnInfluence(load, stations, triangle).max;
-  const fatigue = worstLaneShare(id, deck, bending) * fatigueRange(id, loadTrack(stations), triangle, 2 * p);
+  const traffic = longer * trafficOnInfluence(load, stations, triangle).max;
+  const fatigue =
+    longer * worstLaneShare(id, deck, bending) * fatigueRange(id, loadTrack(stations), triangle, 2 * p);
   const shear = Math.max(
     ...[0, 1].map(
       (k) => trafficOnInfluence(trafficOnGirder(id, deck, [-b / 2, b / 2], k), stations, triangle).max,
@@ -199,18 +210,19 @@ function sizeCross(
   const carriageway = deck.carriagewayM;
   const edge = Math.max(0, (b - deck.widthM) / 2 + floorData.edgeArmM.value);
   const superimposedMoment =
-    (on.surfacingKNm * p * (2 * b - carriageway)) / 8 + ((on.edgesKNm * p) / 2) * edge;
+    longer * ((on.surfacingKNm * p * (2 * b - carriageway)) / 8 + ((on.edgesKNm * p) / 2) * edge);
   const stringersKNm = (stringersKgPerM * 9.81) / 1000;
   const depthM = Math.max(leastSteelM, floor.depthM - slab.midM);
   let ownKNm = 2;
   let beam: FloorBeam | null = null;
   for (let pass = 0; pass < 2; pass++) {
     const overDeck = (slabKNm + stringersKNm) * p;
-    const dead = (overDeck * (2 * b - deck.widthM)) / 8 + (ownKNm * b * b) / 8;
-    const casting = dead + (floorData.construction.kNm2 * deck.widthM * p * (2 * b - deck.widthM)) / 8;
+    const dead = (longer * (overDeck * (2 * b - deck.widthM))) / 8 + (ownKNm * alongM * alongM) / 8;
+    const casting =
+      dead + (longer * (floorData.construction.kNm2 * deck.widthM * p * (2 * b - deck.widthM))) / 8;
     beam = floorBeam(
       {
-        spanM: b,
+        spanM: alongM,
         depthM,
         slabM: slab.midM,
         slabWidthM: Math.min(p, b / 4),
@@ -219,7 +231,7 @@ function sizeCross(
         superimposedKNm: uls.superimposed * superimposedMoment,
         trafficKNm: uls.traffic * traffic + (floor.frameKNm ?? 0),
         shearKN:
-          (uls.permanent * (overDeck + ownKNm * b) + uls.superimposed * on.totalKNm * p) / 2 +
+          (uls.permanent * (overDeck + ownKNm * alongM) + uls.superimposed * on.totalKNm * p) / 2 +
           uls.traffic * shear,
         fatigueKNm: fatigue,
         trafficCharacteristicKNm: traffic,

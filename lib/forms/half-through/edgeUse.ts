@@ -98,11 +98,13 @@ function framesOf(
   const { frame, frameKNm } = girder;
   const spacingM = Math.max(...girder.beds.map((bed) => bed.spacingM));
   const { traffic } = c.standard.factors.uls;
+  // A turned frame moves the flange across by 1 / cos of what its head moves, and is bent by 1 / cos of what it holds.
+  const { cosine = 1 } = frame;
   // End rotation of a simple beam under a bending moment like that of a uniform load: M b / 3 E I.
   const turn =
     (traffic * crossGirder.trafficCharacteristicKNm * frame.planesM) /
     (3 * steelKNm2 * crossGirder.shortInertiaM4);
-  const turningKN = turningForceKN(turn, frame.leverM, frameKNm, flangeKNm2, spacingM);
+  const turningKN = turningForceKN(turn / cosine, frame.leverM, frameKNm, flangeKNm2, spacingM);
   const wind = (halfThroughData.windKNm2.value * spacingM * frame.postM ** 2) / 2;
   const fy = c.yieldMPa(girder.choice.post.webMm / 1000) * 1000;
   const gamma = c.standard.resistance.steel;
@@ -113,7 +115,7 @@ function framesOf(
   const weakest = Math.min(girder.post.modulusM3, crossModulus);
   return {
     turningKN,
-    postKNm: (holdingKN + turningKN) * frame.postM + wind,
+    postKNm: ((holdingKN + turningKN) * frame.postM + wind) / cosine,
     postMayKNm: (girder.post.modulusM3 * fy) / gamma,
     impactKNm: ownShare(frameKNm / spacingM, flangeKNm2, spacingM) * impact.forceKN * impactArm,
     impactMayKNm: weakest * fy,

@@ -50,9 +50,9 @@ export function halfThroughLines(unit: HalfThroughUnit): MeasuredLine[] {
       `${(100 * halfThroughData.detailShare.value).toFixed(0)} % of the girders`,
     ),
     steel(
-      crossCount * floor.crossGirder.massKgPerM * c.planesM,
+      crossCount * floor.crossGirder.massKgPerM * floor.crossM,
       'cross-girders',
-      `${crossCount} of ${c.planesM.toFixed(1)} m, ${floor.crossGirder.massKgPerM.toFixed(0)} kg/m`,
+      `${crossCount} of ${floor.crossM.toFixed(1)} m, ${floor.crossGirder.massKgPerM.toFixed(0)} kg/m`,
     ),
     steel(girder.endCrossKg, 'end frames', `cross-girders at supports, ${girder.endFrames} frames each`),
     measured('deck', 'deck-concrete', floor.slab.meanM * deckM2, 'deck slab', `${mm(floor.slab.meanM)} mm`),

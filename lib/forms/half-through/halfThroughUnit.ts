@@ -1,5 +1,6 @@
 import type { UnitTask } from '../../model/index.ts';
 import { windowOf } from '../../rules/index.ts';
+import { cosineOfSkew } from '../../site/skew.ts';
 import { sizeFloor, type Floor } from '../floor/sizeFloor.ts';
 import { edgeCase, type EdgeCase } from './edgeCase.ts';
 import { edgeStatics, type EdgeStatics } from './edgeStatics.ts';
@@ -40,7 +41,7 @@ export function halfThroughUnit(task: UnitTask): HalfThroughUnit {
   const consider = (choice: EdgeChoice): boolean => {
     const girder = sizeEdgeGirder(c, first, choice, best ? { passes: 1, like: best.girder } : { passes: 2 });
     const use = worstUse(edgeUse(c, first, girder));
-    const steelKg = steelOf(c, girder);
+    const steelKg = steelOf(girder);
     const rank = steelKg * (use > 1 ? 10 * use : 1);
     if (best && !(rank < best.rank)) return false;
     best = { girder, steelKg, rank };
@@ -57,7 +58,8 @@ export function halfThroughUnit(task: UnitTask): HalfThroughUnit {
       crossSpacingM,
       depthM: task.depthM,
       stringers: false,
-      frameKNm,
+      frameKNm: frameKNm / cosineOfSkew(task.skewDeg ?? null),
+      ...(task.skewDeg === undefined ? {} : { skewDeg: task.skewDeg }),
     });
     const post = posts[Math.floor(posts.length / 2)]!;
     for (const heightM of best ? [best.girder.choice.heightM] : heights)
@@ -83,14 +85,14 @@ export function halfThroughUnit(task: UnitTask): HalfThroughUnit {
     use = edgeUse(c, statics, girder);
   }
   const { floor, panels } = girder.choice;
-  return { case: c, statics, girder, use, floor, panels, steelKg: steelOf(c, girder) };
+  return { case: c, statics, girder, use, floor, panels, steelKg: steelOf(girder) };
 }
 
 /** Both girders, all cross-girders and what the end frames add, kg. */
-function steelOf(c: EdgeCase, girder: EdgeGirder): number {
+function steelOf(girder: EdgeGirder): number {
   const { platesKg, postsKg, bearingKg, detailKg, endCrossKg, choice } = girder;
   const crossGirders = choice.panels.reduce((sum, n) => sum + n, 1);
-  const crossKg = crossGirders * choice.floor.crossGirder.massKgPerM * c.planesM;
+  const crossKg = crossGirders * choice.floor.crossGirder.massKgPerM * choice.floor.crossM;
   return 2 * (platesKg + postsKg + bearingKg + detailKg) + endCrossKg + crossKg;
 }
 

@@ -4,6 +4,7 @@ import type { Design, SupportReaction, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
+import { skewPlanesWarnings } from '../common/skewPlanes.ts';
 import { overLimit } from '../common/warnings.ts';
 import { elementsPerSpan } from '../composite-i/elementsPerSpan.ts';
 import type { FormModule } from '../formModule.ts';
@@ -22,7 +23,7 @@ import { halfThroughUnit, type HalfThroughUnit } from './halfThroughUnit.ts';
  * The girders carry everything as bare steel: the slab lies near their pulled flange and has cracked there. Their top
  * flange is held by U-frames alone. Over piers the slab near the pressed flange would help and is left out. Frames at
  * the supports give the flange its end. Widening is ruled out by the girders themselves.
- * Simple and continuous spans; equal girders.
+ * On a skew its frames run along the supports and stand turned to the girders. Simple and continuous spans; equal girders.
  */
 export const halfThrough: FormModule = {
   id: 'half-through',
@@ -31,6 +32,7 @@ export const halfThrough: FormModule = {
   pattern: { kind: 'continuous' },
   methods: ['crane', 'launch'],
   ignoresHeight: true,
+  readsSkew: true,
   size,
 };
 
@@ -53,6 +55,7 @@ function size(task: UnitTask): Design {
     heaviestPiece: heaviestPiece(unit),
     warnings: [
       ...overLimit(checks, 'plates'),
+      ...skewPlanesWarnings(task, unit.case.planesM, checks.find(({ id }) => id === 'deflection')!.demand),
       'The girders stand on both sides of the road: it cannot be widened later.',
     ],
     figures: figuresOf(unit),

@@ -16,6 +16,7 @@ import { edgeDemand, type EdgeDemand, type EdgeLoads, type EdgeStatics } from '.
 import { flangeUse, noFlangeUse, type Bed, type EdgeRules } from './flangeUse.ts';
 import { framePost, type FramePost } from './framePost.ts';
 import { halfThroughData, type PostSection } from './halfThroughData.ts';
+import { cosineOfSkew } from '../../site/skew.ts';
 import { endShare, frameStiffnessKNm, steelKNm2, type UFrame } from './uFrame.ts';
 
 /** What is chosen before the plates are sought. */
@@ -237,7 +238,8 @@ function frameOf(c: EdgeCase, { heightM, floor }: EdgeChoice, post: FramePost, p
   return {
     postM: flangeZ - crossM,
     leverM: flangeZ - crossM / 2,
-    planesM: c.planesM,
+    planesM: floor.crossM,
+    cosine: cosineOfSkew(c.task.skewDeg ?? null),
     postInertiaM4: post.inertiaM4,
     // The slab adds stiffness where it is pressed; where it is pulled it has cracked.
     crossInertiaM4: floor.crossGirder.steelInertiaM4,
@@ -364,6 +366,6 @@ function massesOf(
     postsKg,
     bearingKg,
     detailKg: halfThroughData.detailShare.value * (platesKg + postsKg + bearingKg),
-    endCrossKg: (endFrames - 1) * supports * choice.floor.crossGirder.massKgPerM * c.planesM,
+    endCrossKg: (endFrames - 1) * supports * choice.floor.crossGirder.massKgPerM * choice.floor.crossM,
   };
 }

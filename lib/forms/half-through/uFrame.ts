@@ -9,8 +9,10 @@ export interface UFrame {
   readonly postM: number;
   /** Axis of the cross-girder to the middle of the top flange. */
   readonly leverM: number;
-  /** Length of the cross-girder. */
+  /** Length of the cross-girder between the girders. */
   readonly planesM: number;
+  /** Cosine of the angle at which the frame stands to the girders, cross-girder and posts in one plane; 1 when absent. */
+  readonly cosine?: number;
   readonly postInertiaM4: number;
   readonly crossInertiaM4: number;
 }
@@ -18,11 +20,13 @@ export interface UFrame {
 /**
  * Stiffness of a frame against equal and opposite pushes at both flanges, kN/m:
  * E / (hv3 / 3 Iv + h2 b / 2 Iq) (EN 1993-2 annex D table D.3, from memory; it follows from bending of the three parts).
+ * A frame in a plane that is turned by the skew is bent by v cos of a movement v across the girder, and its force holds by
+ * cos of itself: cos2 of its stiffness.
  */
 export function frameStiffnessKNm(frame: UFrame): number {
   const post = frame.postM ** 3 / (3 * frame.postInertiaM4);
   const cross = (frame.leverM ** 2 * frame.planesM) / (2 * frame.crossInertiaM4);
-  return steelKNm2 / (post + cross);
+  return ((frame.cosine ?? 1) ** 2 * steelKNm2) / (post + cross);
 }
 
 /**

@@ -3,6 +3,7 @@ import type { Check, Design, MeasuredLine, SupportReaction, UnitTask } from '../
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { check, limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
+import { skewPlanesWarnings } from '../common/skewPlanes.ts';
 import { supportPositions, totalLength } from '../common/supports.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
@@ -27,6 +28,7 @@ export const truss: FormModule = {
   pattern: { kind: 'simple-main', approach: 'composite-i' },
   methods: ['crane', 'float-in'],
   mostSpanM: longestTrussM(),
+  readsSkew: true,
   size,
 };
 
@@ -36,7 +38,10 @@ function size(task: UnitTask): Design {
   const starts = supportPositions(task.spansM);
   const governing = spans.reduce((a, b) => (b.spanM > a.spanM ? b : a));
   const checks = checksOf(governing);
-  const warnings = warningsOf(task, checks);
+  const warnings = [
+    ...warningsOf(task, checks),
+    ...skewPlanesWarnings(task, governing.planesM, governing.deflectionM),
+  ];
   const { heights, known } = heightsUnder(task);
   if (!known && task.method === 'crane') {
     warnings.push(
@@ -170,8 +175,9 @@ function heaviestPiece(span: TrussSpan): { lengthM: number; massT: number } {
   const pieceM = Math.min(trussData.pieceLengthM.value, 2 * geometry.panelM);
   const area = Math.max(...members.map(({ section }) => section.areaM2));
   const chordT = area * 7.85 * pieceM * (1 + trussData.connectionShare.value);
-  const crossT = (span.floor.crossGirder.massKgPerM * span.planesM) / 1000;
-  return chordT >= crossT ? { lengthM: pieceM, massT: chordT } : { lengthM: span.planesM, massT: crossT };
+  const { crossGirder, crossM } = span.floor;
+  const crossT = (crossGirder.massKgPerM * crossM) / 1000;
+  return chordT >= crossT ? { lengthM: pieceM, massT: chordT } : { lengthM: crossM, massT: crossT };
 }
 
 function figuresOf(span: TrussSpan, deckAreaM2: number, spans: readonly TrussSpan[]): Record<string, number> {

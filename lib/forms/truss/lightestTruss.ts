@@ -97,9 +97,9 @@ function candidate(layout: Layout, height: number, ownKNm: number | undefined): 
 }
 
 /** Steel of a span: one more cross-girder than panels. */
-function steelOf(truss: SizedTruss, { floor, case: c }: Layout): number {
+function steelOf(truss: SizedTruss, { floor }: Layout): number {
   const { spanM } = truss.geometry;
-  const lastKg = floor.crossGirder.massKgPerM * c.planesM;
+  const lastKg = floor.crossGirder.massKgPerM * floor.crossM;
   return 2 * truss.planeKg + truss.bracing.massKg + floor.steelKgPerM * spanM + lastKg;
 }
 

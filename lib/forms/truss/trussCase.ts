@@ -18,6 +18,9 @@ export interface TrussCase {
   readonly memberWidthM: number;
   /** Between the two planes, m. */
   readonly planesM: number;
+  /** Length of what runs across along the supports, and bearings of one plane ahead of the other, m; 0 ahead on a square deck. */
+  readonly crossM: number;
+  readonly aheadM: number;
   /** Floor face that the wind meets, m. */
   readonly floorDepthM: number;
 }

@@ -15,7 +15,7 @@ const groups: readonly { readonly what: string; readonly roles: readonly MemberR
 
 /** Measured lines of one span: both trusses, bracing, floor, slab, paint. */
 export function trussLines(span: TrussSpan, task: UnitTask): MeasuredLine[] {
-  const { truss, floor, spanM, planesM } = span;
+  const { truss, floor, spanM } = span;
   const lines: MeasuredLine[] = [];
   let membersKg = 0;
   let membersPaintM2 = 0;
@@ -52,9 +52,9 @@ export function trussLines(span: TrussSpan, task: UnitTask): MeasuredLine[] {
     measured(
       'deck',
       'plate-girder-steel',
-      floor.crossGirder.massKgPerM * planesM * (truss.geometry.panels + 1),
+      floor.crossGirder.massKgPerM * floor.crossM * (truss.geometry.panels + 1),
       'cross-girders',
-      `${truss.geometry.panels + 1} of ${planesM.toFixed(1)} m`,
+      `${truss.geometry.panels + 1} of ${floor.crossM.toFixed(1)} m`,
     ),
     measured(
       'deck',

@@ -9,6 +9,7 @@ import {
   type TrafficLoad,
 } from '../../actions/index.ts';
 import type { UnitTask } from '../../model/index.ts';
+import { aheadM } from '../common/skewPlanes.ts';
 import { fatigueLimitMPa } from '../floor/fatigue.ts';
 import { sizeFloor, type Floor } from '../floor/sizeFloor.ts';
 import { lightestTruss, type Layout } from './lightestTruss.ts';
@@ -61,6 +62,7 @@ export function trussSpan(spanM: number, task: UnitTask): TrussSpan {
       crossSpacingM: spanM / panels,
       depthM: task.depthM,
       stringers: true,
+      ...(task.skewDeg === undefined ? {} : { skewDeg: task.skewDeg }),
     });
     const c = trussCase(task, standard, floor, planesM, widestM);
     for (const hangers of [false, true]) {
@@ -109,6 +111,8 @@ function trussCase(
     },
     memberWidthM,
     planesM,
+    crossM: floor.crossM,
+    aheadM: aheadM(planesM, task.skewDeg),
     floorDepthM: task.depthM,
   };
 }
