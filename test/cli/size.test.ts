@@ -163,6 +163,7 @@ describe('size', () => {
     ['concrete-box --spans 35,45,35 --depth 2.1', 'reinforcementKg'],
     ['truss --spans 80 --depth 1.5', 'structuralSteelKg'],
     ['half-through --spans 30 --depth 1.2', 'structuralSteelKg'],
+    ['cable-stayed --spans 80,200,80 --depth 1.9', 'structuralSteelKg'],
   ])(
     'size(%s --skew) is the same either way, and heavier than square; 0 is square to the last digit',
     (unit, of) => {

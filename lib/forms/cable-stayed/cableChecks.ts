@@ -2,6 +2,7 @@ import { materials, serviceTraffic, trafficOnInfluence } from '../../actions/ind
 import type { Check } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
 import { cableData } from './cableData.ts';
+import { skewEndCheck } from './skewEnds.ts';
 import type { SizedBridge } from './sizePlane.ts';
 import { serviceMPa, stayRangeLimitMPa } from './sizeStays.ts';
 import { deckPush } from './stayForces.ts';
@@ -64,6 +65,7 @@ export function cableChecks(bridge: SizedBridge): Check[] {
     ),
     deckBuckling(bridge),
     ...bridge.floor.checks,
+    ...skewEndCheck(bridge.endFloor),
   );
   const pylon = pylons.reduce((a, b) => (b.utilisation > a.utilisation ? b : a));
   checks.push(

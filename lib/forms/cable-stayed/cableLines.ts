@@ -2,6 +2,7 @@ import { materials } from '../../actions/index.ts';
 import type { MeasuredLine, UnitTask } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
 import { cableData } from './cableData.ts';
+import { skewEndKg } from './skewEnds.ts';
 import type { SizedBridge } from './sizePlane.ts';
 import { stayMassKg } from './sizeStays.ts';
 
@@ -74,6 +75,17 @@ export function cableLines(bridge: SizedBridge, task: UnitTask): MeasuredLine[] 
       'to the anchor piers',
     ),
   ];
+  const endsKg = skewEndKg(floor, bridge.endFloor);
+  if (endsKg > 0)
+    lines.push(
+      measured(
+        'deck',
+        'plate-girder-steel',
+        endsKg,
+        'end cross-girders along the supports',
+        `two of ${bridge.endFloor!.crossM.toFixed(1)} m, over square ones`,
+      ),
+    );
   if (thickerM3 > 0)
     lines.push(
       measured(

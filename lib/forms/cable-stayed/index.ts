@@ -10,6 +10,7 @@ import { cableData } from './cableData.ts';
 import { cableElevation, cableSections } from './cableDrawing.ts';
 import { cableLines } from './cableLines.ts';
 import { cableReactions } from './cableReactions.ts';
+import { skewWarnings } from './skewEnds.ts';
 import { sizePlane, type SizedBridge } from './sizePlane.ts';
 import { stayMassKg } from './sizeStays.ts';
 import { deckPush } from './stayForces.ts';
@@ -28,6 +29,7 @@ export const cableStayed: FormModule = {
   name: 'Cable-stayed',
   pattern: { kind: 'pylon', approach: 'composite-i', onePylonBack: [0.5, 1], twoPylonSide: [0.33, 0.47] },
   methods: ['stay-cantilever'],
+  readsSkew: true,
   size,
 };
 
@@ -73,6 +75,7 @@ function warningsOf(bridge: SizedBridge, task: UnitTask): string[] {
     );
   if (Number.isFinite(task.planRadiusM))
     warnings.push('Stays of a curved deck pull the pylon sideways; the pylon is sized for a straight one.');
+  warnings.push(...skewWarnings(task, { ...bridge, mainSpanM: layout.mainSpanM }));
   return warnings;
 }
 

@@ -9,7 +9,7 @@ import {
 } from '../../actions/index.ts';
 import { loadTrack, type Track } from '../../mechanics/index.ts';
 import type { UnitTask } from '../../model/index.ts';
-import { sizeFloor, type Floor } from '../floor/sizeFloor.ts';
+import { sizeFloor, type Floor, type FloorCase } from '../floor/sizeFloor.ts';
 import { cableData } from './cableData.ts';
 import { cableModel, type CableModel } from './cableModel.ts';
 import { deckSections, deckZones, type DeckZone } from './deckZones.ts';
@@ -24,6 +24,7 @@ import {
   type SizedStay,
   type StayTraffic,
 } from './sizeStays.ts';
+import { skewEndFloor } from './skewEnds.ts';
 import { lastingForces, type LastingForces } from './stayForces.ts';
 import { stayLayout, usualPylons, type StayLayout } from './stayLayout.ts';
 
@@ -33,6 +34,8 @@ export interface SizedBridge {
   readonly layout: StayLayout;
   readonly planesM: number;
   readonly floor: Floor;
+  /** Floor at the skew ends; null on square supports. */
+  readonly endFloor: Floor | null;
   readonly traffic: TrafficLoad;
   readonly lasting: LastingForces;
   readonly stays: readonly SizedStay[];
@@ -68,14 +71,15 @@ export function sizePlane(task: UnitTask): SizedBridge {
   const traffic = both[heavier]!;
   const fatigueShare = worstLaneShare(task.standard, deck, rigidCrossbeam(planes, heavier));
   const bays = Math.max(1, Math.round(spacingM / cableData.crossSpacingM.value));
-  const floor = sizeFloor({
+  const floorCase: FloorCase = {
     standard: task.standard,
     deck,
     planesM,
     crossSpacingM: spacingM / bays,
     depthM: Math.min(task.depthM, cableData.crossDepthOverPlanes.value * planesM + 0.25),
     stringers: false,
-  });
+  };
+  const floor = sizeFloor(floorCase);
   const symmetrical = isSymmetrical(task.spansM, layout);
   const zones = deckZones(layout, symmetrical);
   // Legs reach from the ground to the deck's face.
@@ -147,6 +151,7 @@ export function sizePlane(task: UnitTask): SizedBridge {
     layout,
     planesM,
     floor,
+    endFloor: skewEndFloor(task, floorCase),
     traffic,
     lasting,
     stays,

@@ -5,7 +5,7 @@ import { leastSteelM } from './sizeFloor.ts';
 /** Checks of a floor of cross-girders and stringers between two main planes, for the forms that have one. */
 export function floorCheckFigures({ check }: ReturnType<typeof formManual>): Descriptor[] {
   return [
-    ...['cross-girder', 'stringer'].flatMap((id) =>
+    ...['cross-girder', 'end-cross-girder', 'stringer'].flatMap((id) =>
       check(
         id,
         [
@@ -13,6 +13,7 @@ export function floorCheckFigures({ check }: ReturnType<typeof formManual>): Des
           'planesM',
           'slabM',
           './task/depthM',
+          './task/skewDeg?',
         ],
         ['1 by definition'],
         'EN 1993-1-1, EN 1993-1-9, EN 1994-2 (from memory)',
