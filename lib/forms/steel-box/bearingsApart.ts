@@ -3,6 +3,9 @@ import type { BoxEffects } from './boxEffects.ts';
 import { steelBoxData } from './steelBoxData.ts';
 import { elementsPerSpan, type SteelBoxModel } from './steelBoxModel.ts';
 
+/** Of a uniform load on an end span its end takes this much where the far end is held. */
+const END_SHARE = 3 / 8;
+
 /** Two bearings under the box at one support. */
 export interface BearingPair {
   /** Distance at which eccentric traffic and curvature lift neither, m. */
@@ -15,8 +18,9 @@ export interface BearingPair {
 }
 
 /**
- * Bearings at a support as eccentric traffic over both spans beside it and curvature turn the box. What makes the torque
- * presses at least so much that it stands no farther out than the outer lane.
+ * Bearings at a support as eccentric traffic over both spans beside it, curvature and skew ends turn the box. What makes the torque
+ * presses at least so much that it stands no farther out than the outer lane; what slopes a skew end presses it by the
+ * uniform load of the end span.
  * @param ownKN lasting reaction of the steel, kN
  */
 export function bearingPair(
@@ -34,8 +38,14 @@ export function bearingPair(
   const farthestM = (deck.carriagewayM - standard.lanes.widthM) / 2 + Math.abs(deck.carriagewayOffsetM);
   const lastingKN =
     uls.permanentFavourable * ownKN + uls.superimposedFavourable * effects.superimposed.reactionKN[support]!;
-  const pressKN = (lastingKN + (farthestM > 0 ? trafficKNm / farthestM : 0)) / 2;
-  const neededM = pressKN > 0 ? (trafficKNm + effects.curveAtKNm[support]!) / pressKN : Infinity;
+  const shorterM = Math.min(spansM[support - 1] ?? Infinity, spansM[support] ?? Infinity);
+  const skewKNm = effects.skewAtKNm[support]!;
+  const trafficKN = Math.max(
+    farthestM > 0 ? trafficKNm / farthestM : 0,
+    skewKNm > 0 ? uls.traffic * END_SHARE * model.traffic.udlKNm * shorterM : 0,
+  );
+  const pressKN = (lastingKN + trafficKN) / 2;
+  const neededM = pressKN > 0 ? (trafficKNm + effects.curveAtKNm[support]! + skewKNm) / pressKN : Infinity;
   const bottomM = bottomWidth(layout, model.depthM[support * elementsPerSpan]!);
   const insideM = Math.max(0.5 * bottomM, bottomM - steelBoxData.bearings.fromWebsM);
   const mostM = Math.max(insideM, layout.topM);

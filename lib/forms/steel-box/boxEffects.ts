@@ -1,5 +1,6 @@
 import { trafficEnvelope, trafficOnInfluence, type TrafficEnvelope } from '../../actions/index.ts';
 import {
+  bredt,
   deflectionInfluence,
   lineBeam,
   loadTrack,
@@ -10,9 +11,11 @@ import {
   type LineBeam,
   type Track,
 } from '../../mechanics/index.ts';
+import { atSupports, skewTorques, type TwistedDeck } from '../common/skewTorque.ts';
 import { curveTorque } from '../composite-box/tubTorsion.ts';
 import { fatigueRange } from '../floor/fatigue.ts';
 import { cantileveredSpans, erection, type ErectionMoments } from './erection.ts';
+import { bottomWidth } from './boxLayout.ts';
 import { boxSection, noSection, type BoxPlates } from './boxSection.ts';
 import { steelBoxData } from './steelBoxData.ts';
 import { elementsPerSpan, type SteelBoxModel } from './steelBoxModel.ts';
@@ -35,11 +38,16 @@ export interface BoxEffects extends ErectionMoments {
   /** Torque of curvature in plan: greatest, and what it brings to every support, kNm. */
   readonly curveKNm: number;
   readonly curveAtKNm: readonly number[];
+  /** Design torque of skew ends, greatest, and what it brings to every support, kNm; 0 on square supports. */
+  readonly skewKNm: number;
+  readonly skewAtKNm: readonly number[];
   /** Moment range of one lorry equivalent to the whole traffic, kNm at the stations. */
   readonly rangeKNm: Float64Array;
 }
 
 const section = noSection();
+/** Poisson's ratio of steel (EN 1993-1-1 3.2.6, from memory). */
+const steelPoisson = 0.3;
 
 /** Bending stiffness along the box, straight between stations. */
 function stiffness(model: SteelBoxModel, plates: BoxPlates): (xM: number) => number {
@@ -137,7 +145,15 @@ export function boxEffects(
     hogKNm,
     ...stage,
     shearKN: designShear(model, own, superimposed, traffic),
-    ...torques(model, designKNm),
+    ...torques(
+      model,
+      designKNm,
+      skewTorques(
+        twistedDeck(model, plates),
+        skewMoments(model, own, superimposed, traffic),
+        task.skewDeg ?? 0,
+      ),
+    ),
     rangeKNm: before?.rangeKNm ?? lorryRange(model, beam),
   };
 }
@@ -183,11 +199,62 @@ function designShear(
   });
 }
 
-/** Design torques of a box held against turning at every support: eccentric traffic, and M / R of a curve in plan. */
+/** Bending and twisting stiffness of the elements, the box closed by its outer webs (Bredt). */
+function twistedDeck(model: SteelBoxModel, plates: BoxPlates): TwistedDeck {
+  const { layout, elementM, elementDepthM, modulusKNm2, task } = model;
+  const gModulusKNm2 = modulusKNm2 / (2 * (1 + steelPoisson));
+  const eiKNm2 = new Float64Array(elementM.length);
+  const gjKNm2 = elementM.map((_, e) => {
+    const [deckM, webM, bottomM] = [plates.deckM[e]!, plates.webM[e]!, plates.bottomM[e]!];
+    for (const i of [e, e + 1])
+      eiKNm2[e]! +=
+        (modulusKNm2 *
+          boxSection(section, model, i, deckM, webM, bottomM, plates.pressed[e] === 1, 0).inertiaM4) /
+        2;
+    const heightM = elementDepthM[e]!;
+    const soffitM = bottomWidth(layout, heightM);
+    return (
+      gModulusKNm2 *
+      bredt(((layout.topM + soffitM) / 2) * heightM, [
+        { lengthM: layout.topM, thicknessM: deckM },
+        { lengthM: 2 * layout.slant * heightM, thicknessM: webM },
+        { lengthM: soffitM, thicknessM: bottomM },
+      ])
+    );
+  });
+  return {
+    elementM,
+    eiKNm2,
+    gjKNm2,
+    supportAt: Array.from({ length: task.spansM.length + 1 }, (_, j) => j * elementsPerSpan),
+  };
+}
+
+/** Design moments that slope the ends: own weight as if its bearings were there from the start, which is on the safe side. */
+function skewMoments(
+  { standard, xM }: SteelBoxModel,
+  own: Effects,
+  superimposed: Effects,
+  traffic: TrafficEnvelope,
+): Float64Array {
+  const { uls } = standard.factors;
+  return xM.map(
+    (_, i) =>
+      uls.permanent * own.momentKNm[i]! +
+      uls.superimposed * superimposed.momentKNm[i]! +
+      uls.traffic * traffic.momentMaxKNm[i]!,
+  );
+}
+
+/**
+ * Design torques of a box held against turning at every support: eccentric traffic, M / R of a curve in plan, and the
+ * twist of skew ends (by span).
+ */
 function torques(
   { task, standard, torsion }: SteelBoxModel,
   designKNm: Float64Array,
-): Pick<BoxEffects, 'torqueKNm' | 'curveKNm' | 'curveAtKNm'> {
+  skewBySpanKNm: readonly number[],
+): Pick<BoxEffects, 'torqueKNm' | 'curveKNm' | 'curveAtKNm' | 'skewKNm' | 'skewAtKNm'> {
   const uniformKNm = torsion.udlTorqueKNmPerM + torsion.footwayTorqueKNmPerM;
   const torqueKNm = new Float64Array(designKNm.length - 1);
   const curveAtKNm = new Array<number>(task.spansM.length + 1).fill(0);
@@ -207,10 +274,16 @@ function torques(
       const traffic = torsion.vehicleTorqueKNm * rest + (uniformKNm * spanM * rest ** 2) / 2;
       const bent = Math.max(Math.abs(curve[e]!), Math.abs(curve[e + 1]!));
       curveKNm = Math.max(curveKNm, bent);
-      torqueKNm[from + e] = standard.factors.uls.traffic * traffic + bent;
+      torqueKNm[from + e] = standard.factors.uls.traffic * traffic + bent + Math.abs(skewBySpanKNm[span]!);
     }
   });
-  return { torqueKNm, curveKNm, curveAtKNm };
+  return {
+    torqueKNm,
+    curveKNm,
+    curveAtKNm,
+    skewKNm: Math.max(...skewBySpanKNm.map(Math.abs)),
+    skewAtKNm: atSupports(skewBySpanKNm),
+  };
 }
 
 /** Every fourth station is run, the rest lie straight between. */

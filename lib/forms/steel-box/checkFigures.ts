@@ -157,9 +157,10 @@ export const steelBoxCheckFigures: readonly Descriptor[] = [
   ...check(
     'bearing-uplift',
     [
-      'torque of eccentric traffic and of the curve over half of what lasting loads and that traffic press',
+      'torque of eccentric traffic, of the curve and of skew ends over half of what lasting loads and that traffic press',
       'torqueDesignKNm',
       'curveTorqueKNm',
+      './task/skewDeg?',
       'spans',
       './task/deck/superimposedKNm',
     ],

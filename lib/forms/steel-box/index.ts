@@ -1,6 +1,7 @@
 import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
+import { withSkewEnds } from '../common/skewEnds.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { choosePierDepth } from './choosePierDepth.ts';
@@ -27,7 +28,8 @@ export const steelBox: FormModule = {
   alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.8] }],
   methods: ['balanced-cantilever', 'launch'],
   reads: ['haunch'],
-  size,
+  readsSkew: true,
+  size: (task) => withSkewEnds(task, size),
 };
 
 /**

@@ -1,0 +1,39 @@
+import type { Design, UnitTask } from '../../model/index.ts';
+import { carries } from './carries.ts';
+import { aheadM } from './skewPlanes.ts';
+
+/** Name of the figure that holds the greatest design torque of skew ends, kNm; absent on square ends. */
+export const SKEW_TORQUE = 'skewTorqueKNm';
+
+const degrees = (skewDeg: number): string => `Skew ${Number(skewDeg.toFixed(1))} degrees`;
+
+/**
+ * A box on a skew. At its piers two bearings, or what is cast in, stand square to the road under square diaphragms; at its
+ * ends they stand along the skew abutments and twist the end spans. Where one of the two would lift there, the ends are
+ * taken square to the road as well, which is said with what it costs: neither is what a box is given up for.
+ * @param size sizes a task with its ends on its skew
+ */
+export function withSkewEnds(task: UnitTask, size: (task: UnitTask) => Design): Design {
+  const { skewDeg = 0, ...square } = task;
+  if (skewDeg === 0) return size(task);
+  const skew = size(task);
+  const lifts = skew.checks.find(({ id }) => id === 'bearing-uplift');
+  const { [SKEW_TORQUE]: torqueKNm = 0, bearingsApartM = 0 } = skew.figures;
+  if (lifts === undefined || carries(lifts.utilisation))
+    return {
+      ...skew,
+      warnings: [
+        ...skew.warnings,
+        `${degrees(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(torqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(torqueKNm / bearingsApartM / 1e3).toFixed(1)} MN more and the acute by as much less; bearings are priced at their mean.`,
+      ],
+    };
+  const plain = size(square);
+  return {
+    ...plain,
+    task,
+    warnings: [
+      ...plain.warnings,
+      `${degrees(skewDeg)}: of two bearings along a skew abutment the acute would lift (${(100 * lifts.utilisation).toFixed(0)} % of its limit), so the box is sized with all its bearings square to the road. Its ends then need ${aheadM(task.deck.widthM, skewDeg).toFixed(1)} m of slab or sill beyond them at one edge, which is not measured; ends along the skew would have to be tied down.`,
+    ],
+  };
+}
