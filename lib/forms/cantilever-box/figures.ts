@@ -92,6 +92,16 @@ const section: readonly Row[] = [
     'data/concrete-box/compression/total',
   ],
   [
+    'bearingsApartM',
+    'distance of the two bearings under the box, the least',
+    'm',
+    'width of the soffit over the piers, less what they stand inside its edges, at least half of it',
+    'webSpacingM',
+    'cells',
+    './depthM/support',
+    'data/concrete-box/bearings/fromEdgesM',
+  ],
+  [
     'boxInnerHeightM',
     'clear height inside the box at midspan',
     'm',

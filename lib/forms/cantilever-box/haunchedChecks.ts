@@ -9,6 +9,7 @@ import type { BendingUse } from '../concrete-box/ultimateBending.ts';
 import { underSlabChecks } from '../concrete-box/underSlab.ts';
 import { tipsM } from './arms.ts';
 import type { CantileverModel } from './cantileverModel.ts';
+import { haunchedBearingChecks } from './haunchedBearings.ts';
 import type { Hold } from './heldDown.ts';
 import { mostBottomStrands, mostTopStrands } from './findStrands.ts';
 import { cellsAlong, type HaunchedSections } from './sectionsAlong.ts';
@@ -88,6 +89,7 @@ export function haunchedChecks(model: CantileverModel, box: SizedHaunched): Chec
     ...ballastRoom(model, sections),
     check('inner-height', 'height inside for the forms', boxData.leastInnerM.value, sections.innerM, 'm'),
     deflection(model, sections),
+    ...haunchedBearingChecks(model, box),
     ...model.layout.slab.checks,
     ...underSlabChecks(model.layout),
   ];

@@ -1,32 +1,16 @@
-import type { CastInPier, SupportReaction } from '../../model/index.ts';
+import type { CastInPier } from '../../model/index.ts';
 import { middleStation } from '../common/middleStation.ts';
 import { madeFigures } from '../concrete-box/boxConcrete.ts';
 import { underSlabFigures, workingFigures } from '../concrete-box/boxReport.ts';
 import { underSlabBarsKg } from '../concrete-box/underSlab.ts';
 import { laidWhenJoined, type CantileverModel } from './cantileverModel.ts';
+import { haunchedApart } from './haunchedBearings.ts';
 import { haunchedBars } from './haunchedBars.ts';
 import { worstHold } from './haunchedChecks.ts';
 import { heldKNm } from './heldPiers.ts';
 import { along, onFalseworkM, strandTotalKg, underSlabTotalM3, travellersOf } from './haunchedLines.ts';
 import { restraintInUse } from './restraint.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
-
-/**
- * Characteristic reactions of the whole deck: own weight through its stages and creep with diaphragms, superimposed
- * load, traffic. The parasitic part of the tendons adds up to nothing and is left out.
- */
-export function haunchedReactions(model: CantileverModel, { weight }: SizedHaunched): SupportReaction[] {
-  const { most } = model.traffic;
-  const last = model.supportsM.length - 1;
-  // At the two ends the reaction is the shear beside it.
-  const end = (j: number): number =>
-    j === 0 ? most.shearMaxKN[0]! : j === last ? -most.shearMinKN[most.shearMinKN.length - 1]! : 0;
-  return model.supportsM.map((_, j) => ({
-    permanentKN: weight.reactionKN[j]! + model.superimposed.reactionKN[j]!,
-    trafficMaxKN: Math.max(most.reactionMaxKN[j]!, end(j)),
-    trafficMinKN: most.reactionMinKN[j]!,
-  }));
-}
 
 /**
  * Piers that the deck is cast in with, as it meets them; none on bearings throughout. What creep turns after the arms are
@@ -139,6 +123,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     lastingTopStressMPa: found.stresses.top.lastingMPa,
     lastingBottomStressMPa: found.stresses.bottom.lastingMPa,
     pierSoffitMPa: stresses.pierSoffit.stressMPa,
+    bearingsApartM: Math.min(...haunchedApart(model, box)),
     webTrafficShare: shear.webShare,
     shearDesignKN: shear.mostKN,
     chordShearKN: shear.chordKN,

@@ -10,9 +10,10 @@ import { heightUnder } from '../concrete-box/heightUnder.ts';
 import type { FormModule } from '../formModule.ts';
 import { castInFaults } from './castInPiers.ts';
 import { choosePierDepth } from './choosePierDepth.ts';
+import { haunchedReactions } from './haunchedBearings.ts';
 import { haunchedCuts, haunchedDepth, haunchedElevation } from './haunchedDrawing.ts';
 import { haunchedLines } from './haunchedLines.ts';
-import { haunchedCastIn, haunchedFigures, haunchedOwnShare, haunchedReactions } from './haunchedReport.ts';
+import { haunchedCastIn, haunchedFigures, haunchedOwnShare } from './haunchedReport.ts';
 import { haunchedWarnings } from './haunchedWarnings.ts';
 
 /**
@@ -54,7 +55,7 @@ function size(task: UnitTask): Design {
   warnings.push(
     ...curveWarning(
       task,
-      'its webs carry the torque of the curve, but uplift of its bearings and overturning are not checked.',
+      'webs and bearings are checked for the torque of the curve, but bending is that of a straight deck.',
     ),
   );
   if (!heightUnder(task).known)

@@ -30,4 +30,40 @@ export const anyBoxFigures = ({ check }: ReturnType<typeof formManual>): readonl
     ],
     ['span / limit', 'spans', 'data/concrete-box/deflectionRatio'],
   ),
+  ...check(
+    'bearing-uplift',
+    [
+      'torque of eccentric traffic, of M / R of the curve and of vehicles that push outwards by the distance of the bearings, less the least load that makes it',
+      'spans',
+      './task/deck/carriagewayM',
+      './task/planRadiusM',
+      'bearingsApartM',
+      'data/concrete-box/centrifugal/:standard/mostShare',
+      'data/concrete-box/centrifugal/:standard/radiusOfOneM',
+    ],
+    [
+      'lasting reaction on one bearing, its favourable factor on it',
+      'spans',
+      'areaM2',
+      './task/deck/superimposedKNm',
+    ],
+    'EN 1991-2 4.4.2, AASHTO LRFD 3.6.3 (from memory)',
+  ),
+  ...check(
+    'overturning',
+    [
+      'eccentric traffic on the whole deck, one row of vehicles, and M / R of the curve about the bearings of one side, all supports together',
+      'spans',
+      './task/deck/carriagewayM',
+      './task/planRadiusM',
+      'bearingsApartM',
+    ],
+    [
+      'lasting reactions at half of the distance of the bearings',
+      'spans',
+      'areaM2',
+      './task/deck/superimposedKNm',
+      'bearingsApartM',
+    ],
+  ),
 ];

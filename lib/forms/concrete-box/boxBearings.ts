@@ -5,7 +5,6 @@ import { supportUpliftKN } from '../common/supportUplift.ts';
 import { curveTorque } from '../composite-box/tubTorsion.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
-import type { SizedBox } from './sizeBox.ts';
 
 /** What turns a deck over a support or over all of them about its middle, and what holds it. Characteristic. */
 export interface Turning {
@@ -17,6 +16,18 @@ export interface Turning {
   readonly besidePushKNm: number;
   /** Torque of the vehicles that push outwards on a curve, about the bearings, kNm. */
   readonly pushKNm: number;
+}
+
+/** A deck that stands on two bearings at some or all of its supports. */
+export interface OnBearings {
+  readonly model: Pick<BoxModel, 'beam' | 'task' | 'standard' | 'standardId' | 'superimposed' | 'traffic'>;
+  /** Lasting moments of own weight at the stations, kNm. */
+  readonly ownKNm: Float64Array;
+  /** Depth of the box and width of its bottom over each support, m. */
+  readonly depthM: readonly number[];
+  readonly bottomWidthM: readonly number[];
+  /** Whether each support is two bearings: not where the deck is cast in. */
+  readonly onTwo: readonly boolean[];
 }
 
 /** Distance of the two bearings under the box at a support, m. */
@@ -51,22 +62,21 @@ export function curveAtSupports(
 }
 
 /** Turning of each support, vehicles of the heaviest row all over it and uniform loads on half of either span. */
-function turningAt(model: BoxModel, box: SizedBox, reactions: readonly SupportReaction[]): Turning[] {
+function turningAt({ model, ownKNm, depthM }: OnBearings, reactions: readonly SupportReaction[]): Turning[] {
   const { task, standard, standardId, superimposed, traffic } = model;
-  const { spansM, deck, planRadiusM, depthM } = task;
+  const { spansM, deck, planRadiusM } = task;
   const { heightM, withVehicle, withUniform } = boxData.centrifugal[standardId];
   const torsion = trafficTorsion(standardId, deck);
   const heaviestKN = Math.max(
     ...standard.vehicles.map((v) => v.axles.reduce((sum, axle) => sum + axle.loadKN, 0)),
   );
-  const armM = depthM + deck.surfacingM + heightM;
-  const pushKNm = pushShare(standardId, planRadiusM) * traffic.load.vehicleFactor * heaviestKN * armM;
   const outwardKNm = curveAtSupports(
     model,
-    box.own.effects.momentKNm.map((own, i) => own + superimposed.momentKNm[i]!),
+    ownKNm.map((own, i) => own + superimposed.momentKNm[i]!),
   );
   return reactions.map(({ permanentKN }, j) => {
     const besideM = ((spansM[j - 1] ?? 0) + (spansM[j] ?? 0)) / 2;
+    const armM = depthM[j]! + deck.surfacingM + heightM;
     const vehicleKNm = torsion.vehicleTorqueKNm;
     const uniformKNm = (torsion.udlTorqueKNmPerM + torsion.footwayTorqueKNmPerM) * besideM;
     return {
@@ -74,7 +84,7 @@ function turningAt(model: BoxModel, box: SizedBox, reactions: readonly SupportRe
       outwardKNm: outwardKNm[j]!,
       trafficKNm: vehicleKNm + uniformKNm,
       besidePushKNm: withVehicle * vehicleKNm + withUniform * uniformKNm,
-      pushKNm,
+      pushKNm: pushShare(standardId, planRadiusM) * traffic.load.vehicleFactor * heaviestKN * armM,
     };
   });
 }
@@ -88,7 +98,7 @@ function together(all: readonly Turning[], vehicleKNm: number, withVehicle: numb
     outwardKNm: sum((one) => one.outwardKNm),
     trafficKNm: sum((one) => one.trafficKNm) - spare * vehicleKNm,
     besidePushKNm: sum((one) => one.besidePushKNm) - spare * withVehicle * vehicleKNm,
-    pushKNm: all[0]!.pushKNm,
+    pushKNm: Math.max(...all.map((one) => one.pushKNm)),
   };
 }
 
@@ -123,35 +133,35 @@ export function turnedOver(
 
 /**
  * Uplift of one of two bearings at the worst support, and overturning of the deck about the bearings of one side. A support
- * that is pulled up as a whole is held down, so its bearings cannot lift one by one.
+ * that is pulled up as a whole is held down, so its bearings cannot lift one by one; a deck that is cast in anywhere cannot
+ * be overturned about bearings.
  */
-export function bearingChecks(
-  model: BoxModel,
-  box: SizedBox,
-  reactions: readonly SupportReaction[],
-): Check[] {
+export function bearingChecks(on: OnBearings, reactions: readonly SupportReaction[]): Check[] {
+  const { model, onTwo } = on;
   const { deck } = model.task;
   const { uls } = model.standard.factors;
   const factors = { favourable: uls.permanentFavourable, traffic: uls.traffic };
-  const apartM = bearingsApart(box.sections.span.bottomWidthM);
+  const apartM = on.bottomWidthM.map(bearingsApart);
   const farthestM = (deck.carriagewayM - model.standard.lanes.widthM) / 2 + Math.abs(deck.carriagewayOffsetM);
-  const all = turningAt(model, box, reactions);
-  const pressed = all.filter((_, j) => supportUpliftKN(reactions[j]!, uls) <= 0);
-  const uplifts = pressed.map((turning) => {
-    const { overKNm, heldKNm } = turnedOver(turning, apartM, farthestM, factors);
+  const all = turningAt(on, reactions);
+  const uplifts = all.flatMap((turning, j) => {
+    if (!onTwo[j] || supportUpliftKN(reactions[j]!, uls) > 0) return [];
+    const { overKNm, heldKNm } = turnedOver(turning, apartM[j]!, farthestM, factors);
     return check(
       'bearing-uplift',
       'uplift of one of two bearings under the box',
-      overKNm / apartM,
-      heldKNm / apartM,
+      overKNm / apartM[j]!,
+      heldKNm / apartM[j]!,
       'kN',
     );
   });
+  const worst = uplifts.toSorted((a, b) => b.utilisation - a.utilisation).slice(0, 1);
+  if (!onTwo.every(Boolean)) return worst;
   const { vehicleTorqueKNm } = trafficTorsion(model.standardId, deck);
   const whole = together(all, vehicleTorqueKNm, boxData.centrifugal[model.standardId].withVehicle);
-  const { overKNm, heldKNm } = turnedOver(whole, apartM, farthestM, factors);
+  const { overKNm, heldKNm } = turnedOver(whole, Math.min(...apartM), farthestM, factors);
   return [
-    ...uplifts.toSorted((a, b) => b.utilisation - a.utilisation).slice(0, 1),
+    ...worst,
     check('overturning', 'overturning about the bearings of one side', overKNm, heldKNm, 'kNm'),
   ];
 }

@@ -71,7 +71,16 @@ export function boxChecks(model: BoxModel, box: SizedBox, reactions: readonly Su
       'm',
     ),
     trafficDeflection(model, model.concrete.ecmMPa * 1e3 * box.sections.span.inertiaM4),
-    ...bearingChecks(model, box, reactions),
+    ...bearingChecks(
+      {
+        model,
+        ownKNm: box.own.effects.momentKNm,
+        depthM: reactions.map(() => model.task.depthM),
+        bottomWidthM: reactions.map(() => box.sections.span.bottomWidthM),
+        onTwo: reactions.map(() => true),
+      },
+      reactions,
+    ),
   ];
   if (box.launch) {
     const { compressionMPa } = box.launch;
