@@ -1,4 +1,5 @@
 import type { CastInPier } from '../../model/index.ts';
+import { skewFigures } from '../common/skewEnds.ts';
 import { middleStation } from '../common/middleStation.ts';
 import { madeFigures } from '../concrete-box/boxConcrete.ts';
 import { underSlabFigures, workingFigures } from '../concrete-box/boxReport.ts';
@@ -82,6 +83,7 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
   const concreteM3 =
     underM3 + weight.boxM3 + weight.blistersM3 + weight.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
   const { pairs } = travellersOf(model);
+  const apartM = haunchedApart(model, box);
   const most = (values: Float64Array): number => values.reduce((a, b) => Math.max(a, b), 0);
   const figures: Record<string, number> = {
     cells: layout.cells,
@@ -123,7 +125,8 @@ export function haunchedFigures(model: CantileverModel, box: SizedHaunched): Rec
     lastingTopStressMPa: found.stresses.top.lastingMPa,
     lastingBottomStressMPa: found.stresses.bottom.lastingMPa,
     pierSoffitMPa: stresses.pierSoffit.stressMPa,
-    bearingsApartM: Math.min(...haunchedApart(model, box)),
+    ...skewFigures(shear.skewKNm, apartM[0]!),
+    bearingsApartM: Math.min(...apartM),
     webTrafficShare: shear.webShare,
     shearDesignKN: shear.mostKN,
     chordShearKN: shear.chordKN,

@@ -4,6 +4,7 @@ import { curveTorque, trafficShare, tube, webBending } from '../concrete-box/box
 import type { WebDemand } from '../concrete-box/webShear.ts';
 import { cantileverData } from './cantileverData.ts';
 import type { CantileverModel } from './cantileverModel.ts';
+import { haunchedSkew } from './haunchedSkew.ts';
 import type { FoundStrands } from './findStrands.ts';
 import type { HaunchedSections } from './sectionsAlong.ts';
 import type { StagedWeight } from './stages.ts';
@@ -19,11 +20,14 @@ export interface HaunchedShear {
   /** Greatest design shear of the deck, and what the inclined bottom slab takes of it there, kN. */
   readonly mostKN: number;
   readonly chordKN: number;
+  /** Greatest design torque of skew ends, kNm; 0 on square supports. */
+  readonly skewKNm: number;
 }
 
 /**
  * Shear of the outer web with Bredt torsion as in a box of constant depth. In the haunch the compression of the bottom
- * slab, M / z of the lasting moments without factors, is inclined and carries M / z tan(beta) of the shear.
+ * slab, M / z of the lasting moments without factors, is inclined and carries M / z tan(beta) of the shear. Skew ends twist
+ * the end spans.
  */
 export function haunchedShear(
   model: CantileverModel,
@@ -35,6 +39,11 @@ export function haunchedShear(
   const { layout, beam, superimposed, depthM } = model;
   const { most } = model.traffic;
   const torque = curveTorque(model, weight.lastingKNm);
+  const skew = haunchedSkew(model, sections, weight);
+  const skewKNm = skew.lastingKNm.map(
+    (lasting, span) => uls.permanent * Math.abs(lasting) + uls.traffic * Math.abs(skew.trafficKNm[span]!),
+  );
+  let span = 0;
   const lean = Math.hypot(1, layout.slope);
   const states = strandStates(model, found.stresses);
   const { lasting } = states;
@@ -46,6 +55,7 @@ export function haunchedShear(
   const parasitic = (i: number): number =>
     found.parasiticBottomKNm[i]! + lasting.topParasitic * found.parasiticTopKNm[i]!;
   for (let e = 0; e < beam.xM.length - 1; e++) {
+    if (e >= beam.supportAt[span + 1]!) span++;
     const length = beam.xM[e + 1]! - beam.xM[e]!;
     const slope = (depthM[e + 1]! - depthM[e]!) / length;
     const tendon = (parasitic(e + 1) - parasitic(e)) / length;
@@ -73,7 +83,7 @@ export function haunchedShear(
       const even = fixed / layout.webs;
       const web =
         Math.max(Math.abs(even + webShare * moving[0]), Math.abs(even + webShare * moving[1])) +
-        uls.permanent * Math.abs(torque[i]!) * perM;
+        (uls.permanent * Math.abs(torque[i]!) + skewKNm[span]!) * perM;
       if (web > shearKN) {
         shearKN = web;
         at = i;
@@ -94,7 +104,14 @@ export function haunchedShear(
       ...(layout.struts ? { hangKNm: layout.struts.hangKNm } : {}),
     });
   }
-  return { demands, webShare, enclosedM2: middle.enclosedM2, mostKN, chordKN: chordThere };
+  return {
+    demands,
+    webShare,
+    enclosedM2: middle.enclosedM2,
+    mostKN,
+    chordKN: chordThere,
+    skewKNm: Math.max(...skewKNm),
+  };
 }
 
 /** Duct that a web has to do without: tendons rise through it to their anchorages. */

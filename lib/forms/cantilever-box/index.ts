@@ -3,6 +3,7 @@ import { midspanDepthBand } from '../../rules/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { curveWarning } from '../common/curveWarning.ts';
+import { withSkewEnds } from '../common/skewEnds.ts';
 import { overLimit } from '../common/warnings.ts';
 import { boxFaults, refuse } from '../concrete-box/boxFaults.ts';
 import { boxChoices, wideBoxVariants } from '../concrete-box/boxVariants.ts';
@@ -37,7 +38,8 @@ export const cantileverBox: FormModule = {
   faults,
   variants: (spansM, deck, method) =>
     wideBoxVariants(spansM, deck, method, midspanDepthBand('cantilever-box')![1]),
-  size,
+  readsSkew: true,
+  size: (task) => withSkewEnds(task, size),
 };
 
 function faults(task: Omit<UnitTask, 'depthM'>): Problem[] {

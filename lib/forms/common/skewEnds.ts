@@ -2,8 +2,9 @@ import type { Design, UnitTask } from '../../model/index.ts';
 import { carries } from './carries.ts';
 import { aheadM } from './skewPlanes.ts';
 
-/** Name of the figure that holds the greatest design torque of skew ends, kNm; absent on square ends. */
-export const SKEW_TORQUE = 'skewTorqueKNm';
+/** Figures of a box on skew ends: greatest design torque, kNm, and what it shifts from the acute bearing to the obtuse, kN; none on square ends. */
+export const skewFigures = (torqueKNm: number, apartM: number): Record<string, number> =>
+  torqueKNm > 0 ? { skewTorqueKNm: torqueKNm, skewBearingKN: torqueKNm / apartM } : {};
 
 const degrees = (skewDeg: number): string => `Skew ${Number(skewDeg.toFixed(1))} degrees`;
 
@@ -18,13 +19,13 @@ export function withSkewEnds(task: UnitTask, size: (task: UnitTask) => Design): 
   if (skewDeg === 0) return size(task);
   const skew = size(task);
   const lifts = skew.checks.find(({ id }) => id === 'bearing-uplift');
-  const { [SKEW_TORQUE]: torqueKNm = 0, bearingsApartM = 0 } = skew.figures;
+  const { skewTorqueKNm = 0, skewBearingKN = 0 } = skew.figures;
   if (lifts === undefined || carries(lifts.utilisation))
     return {
       ...skew,
       warnings: [
         ...skew.warnings,
-        `${degrees(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(torqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(torqueKNm / bearingsApartM / 1e3).toFixed(1)} MN more and the acute by as much less; bearings are priced at their mean.`,
+        `${degrees(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(skewTorqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(skewBearingKN / 1e3).toFixed(1)} MN more and the acute by as much less; bearings are priced at their mean.`,
       ],
     };
   const plain = size(square);

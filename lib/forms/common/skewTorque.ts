@@ -55,6 +55,9 @@ export function skewTorques(deck: TwistedDeck, momentKNm: ArrayLike<number>, ske
   return out;
 }
 
+/** Of a uniform load on an end span its end takes this much where the far end is held: what traffic presses a skew end by. */
+export const END_SHARE = 3 / 8;
+
 /** Torque that torques along the spans bring to each support, kNm: what changes there. */
 export const atSupports = (bySpanKNm: readonly number[]): number[] =>
   Array.from({ length: bySpanKNm.length + 1 }, (_, j) =>

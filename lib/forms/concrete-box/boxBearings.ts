@@ -16,6 +16,15 @@ export interface Turning {
   readonly besidePushKNm: number;
   /** Torque of the vehicles that push outwards on a curve, about the bearings, kNm. */
   readonly pushKNm: number;
+  /** Torque of skew ends, either way; none where it is absent. */
+  readonly skew?: SkewTurning;
+}
+
+/** Torque of skew ends at a support, kNm, of lasting loads and of traffic, and the least that this traffic presses, kN. */
+export interface SkewTurning {
+  readonly lastingKNm: number;
+  readonly trafficKNm: number;
+  readonly pressKN: number;
 }
 
 /** A deck that stands on two bearings at some or all of its supports. */
@@ -28,6 +37,8 @@ export interface OnBearings {
   readonly bottomWidthM: readonly number[];
   /** Whether each support is two bearings: not where the deck is cast in. */
   readonly onTwo: readonly boolean[];
+  /** Of each support; none where it is absent. */
+  readonly skew?: readonly SkewTurning[];
 }
 
 /** Distance of the two bearings under the box at a support, m. */
@@ -62,7 +73,10 @@ export function curveAtSupports(
 }
 
 /** Turning of each support, vehicles of the heaviest row all over it and uniform loads on half of either span. */
-function turningAt({ model, ownKNm, depthM }: OnBearings, reactions: readonly SupportReaction[]): Turning[] {
+function turningAt(
+  { model, ownKNm, depthM, skew }: OnBearings,
+  reactions: readonly SupportReaction[],
+): Turning[] {
   const { task, standard, standardId, superimposed, traffic } = model;
   const { spansM, deck, planRadiusM } = task;
   const { heightM, withVehicle, withUniform } = boxData.centrifugal[standardId];
@@ -85,11 +99,12 @@ function turningAt({ model, ownKNm, depthM }: OnBearings, reactions: readonly Su
       trafficKNm: vehicleKNm + uniformKNm,
       besidePushKNm: withVehicle * vehicleKNm + withUniform * uniformKNm,
       pushKNm: pushShare(standardId, planRadiusM) * traffic.load.vehicleFactor * heaviestKN * armM,
+      ...(skew ? { skew: skew[j]! } : {}),
     };
   });
 }
 
-/** The deck on all its supports at once: one row of vehicles on it. */
+/** The deck on all its supports at once: one row of vehicles on it. Skew ends turn it opposite ways and add up to nothing. */
 function together(all: readonly Turning[], vehicleKNm: number, withVehicle: number): Turning {
   const sum = (pick: (one: Turning) => number): number => all.reduce((total, one) => total + pick(one), 0);
   const spare = all.length - 1;
@@ -105,7 +120,7 @@ function together(all: readonly Turning[], vehicleKNm: number, withVehicle: numb
 /**
  * Design moments about the bearings of one side, kNm: what turns the deck over them and what holds it. Traffic that makes
  * a torque presses at least so much that it stands no farther out than the outer lane, and a curve carries what it presses
- * as far out as the lasting load. The worse of the two sides, with vehicles pushing outwards and without.
+ * as far out as the lasting load; traffic that twists skew ends presses them. The worse of the two sides, with vehicles pushing outwards and without.
  */
 export function turnedOver(
   turning: Turning,
@@ -114,15 +129,18 @@ export function turnedOver(
   factors: { readonly favourable: number; readonly traffic: number },
 ): { readonly overKNm: number; readonly heldKNm: number } {
   const { lastingKN, outwardKNm, trafficKNm, besidePushKNm, pushKNm } = turning;
+  const { skew = { lastingKNm: 0, trafficKNm: 0, pressKN: 0 } } = turning;
   const offM = lastingKN > 0 ? outwardKNm / lastingKN : 0;
   const sides = [1, -1].map((side) => {
     const net = (torqueKNm: number): number =>
-      torqueKNm + (farthestM > 0 ? (torqueKNm / farthestM) * (side * offM - apartM / 2) : 0);
+      torqueKNm +
+      skew.trafficKNm +
+      Math.max(farthestM > 0 ? torqueKNm / farthestM : 0, skew.pressKN) * (side * offM - apartM / 2);
     const push = side > 0 ? pushKNm : 0;
     const moving = Math.max(0, net(trafficKNm), net(besidePushKNm) + push);
     const lasting = side * outwardKNm;
     return {
-      overKNm: factors.favourable * Math.max(0, lasting) + factors.traffic * moving,
+      overKNm: factors.favourable * (Math.max(0, lasting) + skew.lastingKNm) + factors.traffic * moving,
       heldKNm: factors.favourable * ((lastingKN * apartM) / 2 + Math.max(0, -lasting)),
     };
   });

@@ -1,10 +1,8 @@
+import { END_SHARE } from '../common/skewTorque.ts';
 import { bottomWidth } from './boxLayout.ts';
 import type { BoxEffects } from './boxEffects.ts';
 import { steelBoxData } from './steelBoxData.ts';
 import { elementsPerSpan, type SteelBoxModel } from './steelBoxModel.ts';
-
-/** Of a uniform load on an end span its end takes this much where the far end is held. */
-const END_SHARE = 3 / 8;
 
 /** Two bearings under the box at one support. */
 export interface BearingPair {

@@ -100,6 +100,14 @@ export const statics: readonly Row[] = [
     './task/skewDeg?',
   ],
   [
+    'skewBearingKN',
+    'what skew ends shift from the acute bearing to the obtuse',
+    'kN',
+    'torque of skew ends / distance of the bearings there',
+    'skewTorqueKNm',
+    'bearingsApartM',
+  ],
+  [
     'bearingsApartM',
     'distance of two bearings under the box, the widest',
     'm',

@@ -1,6 +1,6 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { bredt } from '../../mechanics/index.ts';
-import { SKEW_TORQUE } from '../common/skewEnds.ts';
+import { skewFigures } from '../common/skewEnds.ts';
 import { bearingPair } from './bearingsApart.ts';
 import { cantileveredSpans } from './erection.ts';
 import { bottomWidth } from './boxLayout.ts';
@@ -127,7 +127,7 @@ export function steelBoxFigures(box: SizedSteelBox): Record<string, number> {
     ]),
     torqueDesignKNm: Math.max(...effects.torqueKNm),
     curveTorqueKNm: effects.curveKNm,
-    ...(effects.skewKNm > 0 ? { [SKEW_TORQUE]: effects.skewKNm } : {}),
+    ...skewFigures(effects.skewKNm, Math.min(pairs[0]!.apartM, pairs[pairs.length - 1]!.apartM)),
     bearingsApartM: Math.max(...pairs.map(({ apartM }) => apartM)),
     cantileveredSpans: cantileveredSpans(model).length,
     towers: temporaryTowers(model).count,
