@@ -90,6 +90,14 @@ export const factFigures: readonly Descriptor[] = [
     () => ({ skew: 'site/skewDeg' }),
     ({ skew }) => Math.abs(skew),
   ),
+  fact('openSkewM', factOf('openSkewM').meaning, (at) => ({
+    width: 'site/deck/widthM',
+    skew: 'brief/crossing/skewDeg',
+    crossed: [
+      ...at.site.zones.map((_, i) => `site/zones/${i}/fromM`),
+      ...at.site.waters.map((_, i) => `site/waters/${i}/fromM`),
+    ],
+  })),
   fact('continuity', 'continuous over inner supports, simple between two', (at) => ({
     spans: mainSpans(at),
   })),

@@ -1,6 +1,13 @@
 import type { AppraisedOption, Facts, Option, Site, Study, Unit, WorkedOption } from '../model/index.ts';
 import { cannotCarry } from '../forms/index.ts';
-import { roadLevelAt, constructionDepth, groundAt, waterDepthAt } from '../site/index.ts';
+import {
+  cosineOfSkew,
+  TRIAL_SKEW_DEG,
+  roadLevelAt,
+  constructionDepth,
+  groundAt,
+  waterDepthAt,
+} from '../site/index.ts';
 import { quantitiesOf } from '../takeoff/index.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 import { curveFacts } from './curveFacts.ts';
@@ -42,6 +49,10 @@ function sideSpanRatio(unit: Unit, pylons: readonly number[]): number {
   if (pylons.length > 1) return Math.min(before, after) / main;
   return Math.min(before, after) / Math.max(before, after);
 }
+
+/** What an ordinary skew would add to a line of supports, m, where nobody knows it and something is crossed; else 0. */
+const openSkewM = ({ skewDeg, zones, waters, deck: { widthM } }: Site): number =>
+  skewDeg === null && zones.length + waters.length > 0 ? widthM / cosineOfSkew(TRIAL_SKEW_DEG) - widthM : 0;
 
 /** Whether falsework of the main unit would stand over a railway or in water. */
 function falseworkOver(site: Site, main: Unit): Known {
@@ -91,6 +102,7 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
     // A study has one radius for the whole crossing.
     radiusConstant: site.planRadiusM === null ? 'unknown' : true,
     ...crossedFacts(site, option.units, option.method),
+    openSkewM: openSkewM(site),
     ...(option.method === 'falsework' ? falseworkOver(site, main) : {}),
     ...(main.pylons ? { pylons: main.pylons.length, sideSpanRatio: sideSpanRatio(main, main.pylons) } : {}),
     ...(spans.length > 1 && !main.pylons ? { endSpanRatio: endSpanRatio(spans) } : {}),

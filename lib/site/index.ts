@@ -8,7 +8,7 @@ export { profileFor, type ProfileRefusal, type ProfileResult } from './profileFo
 export { proposedProfile } from './profileOn.ts';
 export { easedProfile } from './easedProfile.ts';
 export { abutmentWindows, roadEndsOf, siteOf, standBetween, type AbutmentWindows } from './standBetween.ts';
-export { alongSupportsM, cosineOfSkew } from './skew.ts';
+export { alongSupportsM, cosineOfSkew, TRIAL_SKEW_DEG } from './skew.ts';
 export { survey } from './survey.ts';
 export { roadCurves } from './roadCurves.ts';
 export { roadLevelAt } from './roadLevelAt.ts';

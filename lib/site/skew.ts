@@ -15,3 +15,6 @@ export const alongSupportsM = ({
   skewDeg,
 }: Pick<Site, 'skewDeg'> & { readonly deck: Pick<Site['deck'], 'widthM'> }): number =>
   deck.widthM / cosineOfSkew(skewDeg);
+
+/** Skew at which a study says what one would add while nobody knows it, degrees: between what is ignored and what is avoided (common practice, no source). */
+export const TRIAL_SKEW_DEG = 30;
