@@ -6,7 +6,14 @@ import { slabStatics } from './staticsFigures.ts';
 const { figure, sized } = formManual('slab');
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
-const bars = ['soffit along', 'top along', 'across', 'links', 'chairs and details'];
+const bars = [
+  'soffit along',
+  'top along',
+  'across',
+  'links',
+  'top at the obtuse corners',
+  'chairs and details',
+];
 const area = (at: At) => ({ spans: spansOf(at), width: `${at.unit}/task/deck/widthM` }) as const;
 
 /** Slab bridges: section, quantities of the whole deck, strips of the wheels, steel, checks. */

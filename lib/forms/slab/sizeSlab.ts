@@ -2,6 +2,7 @@ import { bendingCapacity } from '../concrete-box/bendingCapacity.ts';
 import { boxCompressions, type Compressions } from '../concrete-box/boxStress.ts';
 import { barNeeds, pressedFace, type FaceNeed } from './barNeeds.ts';
 import { acrossVolume, barMassKg, barsAcross, type BarsAcross } from './barsAcross.ts';
+import { cornerBarsM3 } from './cornerBars.ts';
 import { findSlabTendons, sectionsOf, type SlabTendons } from './findSlabTendons.ts';
 import { placedBars, volumeAlong } from './placedBars.ts';
 import { punching, type Punching } from './punching.ts';
@@ -29,6 +30,8 @@ export interface SizedSlab {
     readonly high: number;
     readonly across: number;
     readonly links: number;
+    /** At the obtuse corners of a skew slab. */
+    readonly corners: number;
     readonly details: number;
   };
 }
@@ -75,6 +78,7 @@ export function sizeSlab(model: SlabModel): SizedSlab {
       high: barMassKg(volumeAlong(model, highPlaced)),
       across: barMassKg(acrossVolume(model, across) * model.lengthM),
       links: barMassKg(shear.linksM3) + (punched?.linksKg ?? 0),
+      corners: barMassKg(cornerBarsM3(model, low)),
       details: slabDeckData.surfaceBarsKgM3.value * model.concreteM3,
     },
   };

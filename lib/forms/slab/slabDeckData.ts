@@ -41,6 +41,7 @@ const schema = z.object({
     longTermModulusShare: number,
     source,
   }),
+  cornerBars: z.object({ fromSkewDeg: number, reachShare: number, areaShare: number, source }),
   serviceStressShare: cited,
   strip: z.object({ endSpan: number, innerSpan: number, shearSpread: number, source }),
   equivalentStrip: z.object({

@@ -33,6 +33,8 @@ export function slabLines(model: SlabModel, slab: SizedSlab): MeasuredLine[] {
     lines.push(
       steel(barsKg.links, 'links', `shear over ${slab.shear.linkedM.toFixed(1)} m of deck, punching`),
     );
+  if (barsKg.corners > 0)
+    lines.push(steel(barsKg.corners, 'top at the obtuse corners', 'both ways at two corners, by the skew'));
   lines.push(steel(barsKg.details, 'chairs and details', 'chairs, edges, trimming'));
   if (tendons)
     lines.push(
