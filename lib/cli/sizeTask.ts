@@ -186,14 +186,6 @@ export function readTask(argv: readonly string[]): Asked {
   const skewDeg = Math.abs(
     numberFlag(flags, 'skew', { above: -MOST_SKEW_DEG, most: MOST_SKEW_DEG, unit: 'degrees' }, problems) ?? 0,
   );
-  if (form && skewDeg > 0 && !formModule(form).readsSkew)
-    problems.push({
-      code: 'unknown-key',
-      path: ['--skew'],
-      expected: `a form that reads it: ${sizeableForms.filter((id) => formModule(id).readsSkew).join(', ')}`,
-      received: form,
-      remedy: 'leave --skew out; its deck is sized as square',
-    });
   const girders = numberFlag(
     flags,
     'girders',

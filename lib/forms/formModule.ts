@@ -31,8 +31,6 @@ export interface FormModule {
   readonly joined?: 'after-placing' | 'never';
   /** The unit is the same whatever height it stands at: `clearUnderM` of its task is not read. */
   readonly ignoresHeight?: true;
-  /** What a skew of the supports does to the unit is worked out: `skewDeg` of its task is read. */
-  readonly readsSkew?: true;
   /** All supports are walls in one with the deck: `strikes` and `quakeShare` of its task are read. */
   readonly wallsInOne?: true;
   /** Of the choices of a variant those that the form has. */

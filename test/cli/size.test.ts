@@ -176,12 +176,20 @@ describe('size', () => {
     },
   );
 
-  it.each([
-    ['--form slab --skew 61', /skew: expected .* at most 60 degrees, received 61/],
-    ['--form portal-frame --skew 20', /skew: expected a form that reads it: .*truss.*received portal-frame/],
-  ])('size(%s) is refused', (line, told) => {
-    expect(answer(sizeCommand, `${line} --spans 20 --width 12 --lanes 3`).err).toMatch(told);
+  it('size(portal-frame --skew) has longer walls, and says what it leaves out of its deck', () => {
+    const line = '--form portal-frame --spans 18 --width 12 --lanes 3 --depth 0.9';
+    const concrete = (flags: string): number =>
+      JSON.parse(answer(sizeCommand, line + flags).out).supports.concreteM3;
+    expect(concrete(' --skew 20')).toBeGreaterThan(concrete(''));
+    expect(size(`${line} --skew 20`).warnings.join(' ')).toContain('obtuse corners');
   });
+
+  it.each([['--form slab --skew 61', /skew: expected .* at most 60 degrees, received 61/]])(
+    'size(%s) is refused',
+    (line, told) => {
+      expect(answer(sizeCommand, `${line} --spans 20 --width 12 --lanes 3`).err).toMatch(told);
+    },
+  );
 
   it.each([
     ['--light-middles 0,20,0', /light: expected .*--light/],

@@ -55,6 +55,12 @@ describe.each(units)('size(%s) of a skew deck', (form, spansM, depthM) => {
   });
 });
 
+it('size(portal-frame) says what a skew leaves out of its deck, and nothing on square supports', () => {
+  const said = (skewDeg: number): string => sized('portal-frame', [18], 0.9, { skewDeg }).warnings.join(' ');
+  expect(said(20)).toMatch(/Skew 20 degrees.*obtuse corners/);
+  expect(said(0)).not.toContain('Skew');
+});
+
 it('size(portal-frame) makes its walls twice as long at 60 degrees, and leaves its deck', () => {
   const at = (skewDeg: number) => {
     const { lines } = sized('portal-frame', [18], 0.9, { skewDeg });

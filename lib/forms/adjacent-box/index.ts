@@ -13,7 +13,6 @@ export const adjacentBox: FormModule = {
   name: 'Adjacent box beams',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
-  readsSkew: true,
   joined: 'never',
   ignoresHeight: true,
   reads: ['girders'],

@@ -29,7 +29,6 @@ export const cableStayed: FormModule = {
   name: 'Cable-stayed',
   pattern: { kind: 'pylon', approach: 'composite-i', onePylonBack: [0.5, 1], twoPylonSide: [0.33, 0.47] },
   methods: ['stay-cantilever'],
-  readsSkew: true,
   size,
 };
 

@@ -38,7 +38,6 @@ export const cantileverBox: FormModule = {
   faults,
   variants: (spansM, deck, method) =>
     wideBoxVariants(spansM, deck, method, midspanDepthBand('cantilever-box')![1]),
-  readsSkew: true,
   size: (task) => withSkewEnds(task, size),
 };
 

@@ -31,7 +31,6 @@ export const compositeBox: FormModule = {
   name: 'Composite box girders',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
-  readsSkew: true,
   size,
 };
 

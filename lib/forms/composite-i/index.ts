@@ -26,7 +26,6 @@ export const compositeI: FormModule = {
   name: 'Composite I-girders',
   pattern: { kind: 'continuous' },
   methods: ['crane', 'launch'],
-  readsSkew: true,
   ignoresHeight: true,
   choices: ['haunchRatio', 'substringers'],
   reads: ['girders', 'haunch'],

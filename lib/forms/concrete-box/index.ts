@@ -28,7 +28,6 @@ export const concreteBox: FormModule = {
   name: 'Concrete box',
   pattern: { kind: 'continuous' },
   methods: ['falsework', 'launch'],
-  readsSkew: true,
   choices: boxChoices,
   faults: boxFaults,
   variants: (spansM, deck, method) =>

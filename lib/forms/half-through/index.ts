@@ -32,7 +32,6 @@ export const halfThrough: FormModule = {
   pattern: { kind: 'continuous' },
   methods: ['crane', 'launch'],
   ignoresHeight: true,
-  readsSkew: true,
   size,
 };
 

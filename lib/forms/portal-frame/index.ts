@@ -48,6 +48,10 @@ function size(task: UnitTask): Design {
   const checks = frameChecks(model, sized);
   const warnings = overLimit(checks, model.prestressed ? 'tendons and bars' : 'bars');
   warnings.push(...curveWarning(task, 'all its figures are those of a straight deck.'));
+  if ((task.skewDeg ?? 0) > 0)
+    warnings.push(
+      `Skew ${Number(task.skewDeg!.toFixed(1))} degrees: walls are as long as the skew makes them; the deck spans as if square, and what it carries at its obtuse corners and the twist of skew earth pressure are left out.`,
+    );
   if (task.clearUnderM === undefined)
     warnings.push(
       `Height under the deck is not given: walls are sized for ${portalData.leg.assumedClearM} m under the soffit.`,

@@ -15,7 +15,6 @@ export const precastI: FormModule = {
   name: 'Precast I-beams',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
-  readsSkew: true,
   joined: 'after-placing',
   reads: ['girders'],
   size: (task) => (mustBeSpliced(task) ? sizeSpliced(task) : sizePrecast(iBeams, task)),

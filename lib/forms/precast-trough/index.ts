@@ -13,7 +13,6 @@ export const precastTrough: FormModule = {
   name: 'Precast troughs',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
-  readsSkew: true,
   joined: 'after-placing',
   ignoresHeight: true,
   reads: ['girders'],

@@ -25,7 +25,6 @@ export const slab: FormModule = {
   name: 'Slab',
   pattern: { kind: 'continuous' },
   methods: ['falsework'],
-  readsSkew: true,
   leastDepthM,
   size,
 };

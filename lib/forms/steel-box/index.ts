@@ -28,7 +28,6 @@ export const steelBox: FormModule = {
   alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.8] }],
   methods: ['balanced-cantilever', 'launch'],
   reads: ['haunch'],
-  readsSkew: true,
   size: (task) => withSkewEnds(task, size),
 };
 

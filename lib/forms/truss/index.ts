@@ -28,7 +28,6 @@ export const truss: FormModule = {
   pattern: { kind: 'simple-main', approach: 'composite-i' },
   methods: ['crane', 'float-in'],
   mostSpanM: longestTrussM(),
-  readsSkew: true,
   size,
 };
 
