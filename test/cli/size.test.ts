@@ -7,6 +7,7 @@ interface Sized {
   readonly deckAreaM2: number;
   readonly perM2: Record<string, number>;
   readonly quantities: Record<string, number>;
+  readonly supports: Record<string, number>;
   readonly lines: { item: string; what: string; quantity: number; unit: string; how: string }[];
   readonly checks: { id: string; utilisation: number }[];
   readonly limitingCheck: string;
@@ -178,8 +179,7 @@ describe('size', () => {
 
   it('size(portal-frame --skew) has longer walls, and says what it leaves out of its deck', () => {
     const line = '--form portal-frame --spans 18 --width 12 --lanes 3 --depth 0.9';
-    const concrete = (flags: string): number =>
-      JSON.parse(answer(sizeCommand, line + flags).out).supports.concreteM3;
+    const concrete = (flags: string): number => size(line + flags).supports['concreteM3']!;
     expect(concrete(' --skew 20')).toBeGreaterThan(concrete(''));
     expect(size(`${line} --skew 20`).warnings.join(' ')).toContain('obtuse corners');
   });

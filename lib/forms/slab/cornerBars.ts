@@ -19,7 +19,7 @@ export function cornerBarsM3(
   const perKNm =
     1 / (low.widthM * slabData.leverRatio.value * low.effectiveM * barDesignMPa(standardId) * 1e3);
   const corner = (span: number): number => {
-    const moments = low.designKNm.subarray(beam.supportAt[span]!, beam.supportAt[span + 1]! + 1);
+    const moments = low.designKNm.subarray(beam.supportAt[span], beam.supportAt[span + 1]! + 1);
     const areaM2PerM = areaShare * Math.max(...moments) * perKNm;
     const reachM = reachShare * Math.min(task.spansM[span]!, task.deck.widthM);
     return 2 * areaM2PerM * reachM ** 2;
