@@ -1,4 +1,5 @@
 import type { Appraisal, AppraisedOption, Decision, Effect } from '../model/index.ts';
+import { levelWith } from './levelWith.ts';
 import { sayMoney, sayOdds } from './words.ts';
 
 /** The part of a decision that follows from the appraisal. */
@@ -33,7 +34,7 @@ function whyDropped(
   if (out.length > 0) return sentence(`out by rule: ${out.join('; ')}`);
   const [its, ours] = [sayMoney(other.cost.p50, currency), sayMoney(taken.cost.p50, currency)];
   const chance = sayOdds(standing.odds[other.number]![taken.number]!);
-  const isLevel = standing.groups.some((one) => one.includes(other.number) && one.includes(taken.number));
+  const isLevel = levelWith(standing, taken.number).includes(other.number);
   const cost = `median cost ${its} against ${ours}, cheaper in ${chance} of the draws`;
   const others = said(taken, 'caution');
   const cautions = said(other, 'caution').filter((words) => !others.includes(words));

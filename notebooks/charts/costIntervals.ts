@@ -1,3 +1,4 @@
+import { levelWith } from '../../lib/index.ts';
 import { currencySign, listed, money2, moneyUnit, odds, plain, significant } from '../format.ts';
 import { ofOption, perM2Of, withinOf } from '../drawing/asked.ts';
 import { linearAxis, spreadValues } from '../drawing/axis.ts';
@@ -254,8 +255,6 @@ export function costTable(input: CostIntervalsInput): Table {
       'cannot be separated from',
     ],
     rows: input.options.map((option) => {
-      const group = input.standing.groups.filter((one) => one.includes(option.number)).flat();
-      const others = [...new Set(group)].filter((number) => number !== option.number).map(String);
       const within = input.standing.within[option.number];
       return [
         String(option.number),
@@ -266,7 +265,7 @@ export function costTable(input: CostIntervalsInput): Table {
         })),
         { text: significant(option.pricePerM2.withApproaches, 2), figure: perM2Of(option) },
         within === undefined ? '' : { text: odds(within), figure: withinOf(option) },
-        listed(others),
+        listed(levelWith(input.standing, option.number).map(String)),
       ];
     }),
   };

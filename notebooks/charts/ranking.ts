@@ -1,3 +1,4 @@
+import { levelWith } from '../../lib/index.ts';
 import {
   currencySign,
   listed,
@@ -67,8 +68,7 @@ function why(
   const out = option.rulings.filter((ruling) => ruling.effect === 'out');
   if (option.status === 'out' || out.length > 0) return { words: out[0]?.because[0] ?? 'out', fails: true };
   if (input.standing.leader === option.number) return { words: 'leads', fails: false };
-  const group = input.standing.groups.find((one) => one.includes(option.number)) ?? [];
-  const others = group.filter((number) => number !== option.number);
+  const others = levelWith(input.standing, option.number);
   if (others.length > 0)
     return { words: `cannot be separated from ${listed(others.map(String))}`, fails: false };
   const caution = option.rulings.find((ruling) => ruling.effect === 'caution');

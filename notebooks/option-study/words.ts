@@ -1,3 +1,4 @@
+import { levelWith } from '../../lib/index.ts';
 import type { Appraisal, AppraisedOption, Brief, Site, Spread, Study } from '../../lib/index.ts';
 import { spanPaths, spansOf } from '../drawing/alongOption.ts';
 import { ofOption } from '../drawing/asked.ts';
@@ -50,8 +51,8 @@ export function answerWords({ options, standing, currency }: Appraisal): HtmlChi
     cost('p90'),
     '.',
   ];
-  const group = standing.groups.find((one) => one.includes(leader.number)) ?? [];
-  const others = options.filter((option) => group.includes(option.number) && option.form !== leader.form);
+  const level = levelWith(standing, leader.number);
+  const others = options.filter((option) => level.includes(option.number) && option.form !== leader.form);
   const rivals = firstOfEachForm(others);
   if (rivals.length === 0) {
     const next = options.find((option) => option.form !== leader.form && option.status !== 'out');

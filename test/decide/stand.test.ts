@@ -1,6 +1,6 @@
 import { expect, it } from 'vitest';
 import type { Contender } from '../../lib/decide/index.ts';
-import { stand } from '../../lib/decide/index.ts';
+import { levelWith, stand } from '../../lib/decide/index.ts';
 import { groupsOf } from '../../lib/decide/groupsOf.ts';
 import { sayMoney, sayOdds } from '../../lib/decide/words.ts';
 import type { Budget } from '../../lib/model/index.ts';
@@ -89,4 +89,13 @@ it('sayMoney(amount) and sayOdds(share) keep to two figures and 5 %', () => {
   expect(sayOdds(0.001)).toBe('less than 5 %');
   expect(sayOdds(0.999)).toBe('more than 95 %');
   expect(sayOdds(0)).toBe('0 %');
+});
+
+it('levelWith(standing, option) reads every group that holds an option, rising, and is the same both ways', () => {
+  const standing = { groups: [[4, 2, 7], [2, 7, 1], [9]] };
+  expect(levelWith(standing, 2)).toEqual([1, 4, 7]);
+  expect(levelWith(standing, 4)).toEqual([2, 7]);
+  expect(levelWith(standing, 9)).toEqual([]);
+  for (const a of [1, 2, 4, 7, 9])
+    for (const b of levelWith(standing, a)) expect(levelWith(standing, b)).toContain(a);
 });
