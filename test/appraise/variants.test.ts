@@ -217,8 +217,8 @@ describe('workOption(variant that was chosen)', () => {
     [{ boxWidthM: 40 }, /Concrete box: box width: expected 2.5 to [\d.]+ m, received 40 m/u],
     [{ strengthMPa: 120 }, /strength: expected 20 to 90 MPa, received 120 MPa/u],
     [{ light: { densityKgM3: 2400 } }, /density: expected 1400 to 2200 kg\/m3/u],
-    [{ light: { densityKgM3: 1800, middleM: [10, 20] } }, /a number for each of 1 spans, received 2/u],
-    [{ ballastKNm: [10, 10] }, /ballast: expected a number for each of 1 spans, received 2/u],
+    [{ light: { densityKgM3: 1800, middleM: [10, 20] } }, /one number for the one span, received 2/u],
+    [{ ballastKNm: [10, 10] }, /ballast: expected one number for the one span, received 2/u],
   ] as const)('is refused with the number where its spans do not allow it: %o', (variant, said) => {
     const site = survey(lowFerry().brief);
     const units = [{ form: 'concrete-box', role: 'main', supportsM: [site.startM, site.endM] }] as const;

@@ -76,7 +76,8 @@ function bySpan(
   if (values === undefined) return [];
   if (values.length === most.length)
     return values.flatMap((value, span) => within([...path, span], value, 0, most[span]!, unit));
-  const expected = `a number for each of ${most.length} spans`;
+  const expected =
+    most.length === 1 ? 'one number for the one span' : `a number for each of ${most.length} spans`;
   return [
     {
       code: 'wrong-type',
