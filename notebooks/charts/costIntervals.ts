@@ -1,7 +1,7 @@
 import { levelWith } from '../../lib/index.ts';
 import { currencySign, listed, money2, moneyUnit, odds, plain, significant } from '../format.ts';
 import { ofOption, perM2Of, withinOf } from '../drawing/asked.ts';
-import { linearAxis, spreadValues } from '../drawing/axis.ts';
+import { costAxis, spreadValues } from '../drawing/axis.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import { interval } from '../drawing/interval.ts';
 import { label } from '../drawing/label.ts';
@@ -125,7 +125,7 @@ export function costIntervals(input: CostIntervalsInput): Piece {
   const bracketRoom = narrow ? 84 : 148;
   const columns = narrow ? 0 : 138;
   const right = widthPx - bracketRoom - columns - (narrow ? 16 : 30);
-  const axis = linearAxis(
+  const axis = costAxis(
     spreadValues(
       options.map((option) => option.cost),
       budget === null ? [] : [budget],

@@ -19,6 +19,23 @@ export function linearAxis(values: readonly number[], left: number, right: numbe
   return { x: (value) => scale(value), ticks: scale.ticks(count), from: low - pad, to: high + pad };
 }
 
+/** Figures a cost is printed with; see `money2`. */
+const COST_FIGURES = 2;
+
+/**
+ * Linear axis over costs: its marks are at most `count` or so, in even steps that two figures of a cost can print. Where
+ * no even step can (costs that differ by less than that), only those marks stay that can be printed so.
+ */
+export function costAxis(values: readonly number[], left: number, right: number, count = 6): Axis {
+  const isPrintable = (tick: number): boolean => Number(tick.toPrecision(COST_FIGURES)) === tick;
+  for (let fewer = count; fewer > 1; fewer -= 1) {
+    const axis = linearAxis(values, left, right, fewer);
+    if (axis.ticks.length > 1 && axis.ticks.every(isPrintable)) return axis;
+  }
+  const axis = linearAxis(values, left, right, count);
+  return { ...axis, ticks: axis.ticks.filter(isPrintable) };
+}
+
 /** Every figure of some spreads and limits, for an axis. */
 export const spreadValues = (spreads: readonly Spread[], more: readonly number[] = []): number[] => [
   ...spreads.flatMap((spread) => [spread.p10, spread.p90]),

@@ -1,7 +1,7 @@
 import { moneyUnit } from '../format.ts';
 import type { AppraisedOption, Site } from '../model.ts';
 import { formInk } from '../forms/formInk.ts';
-import { linearAxis, spreadValues } from './axis.ts';
+import { costAxis, spreadValues } from './axis.ts';
 import { chainagesShown, crossingScale, fullSheetPx, leastScale, wholeWidth } from './elevation.ts';
 import { narrowStack } from './narrowStack.ts';
 import type { Piece } from './piece.ts';
@@ -67,9 +67,9 @@ function layOut(
     isTall,
     sheetPx: Math.max(input.widthPx, drawnPx),
     axis: narrow
-      ? linearAxis(values, 4, input.widthPx - 4)
+      ? costAxis(values, 4, input.widthPx - 4)
       : // Right of the prices per m2, so that the line of the budget does not run through them.
-        linearAxis(values, bodyPx + costStart, input.widthPx - 8, 4),
+        costAxis(values, bodyPx + costStart, input.widthPx - 8, 4),
     unit: moneyUnit(input.currency, largest),
   };
   return { shared, bodyPx, narrow };

@@ -5,6 +5,7 @@ import { dominatedSide, edgeOf, undominated } from '../../notebooks/charts/edge.
 import { depthCurve, depthTable, flatStretch, oncePerDepth } from '../../notebooks/charts/depthCurve.ts';
 import { groupOdds } from '../../notebooks/charts/costIntervals.ts';
 import { logTicks } from '../../notebooks/charts/logTicks.ts';
+import { costAxis, linearAxis } from '../../notebooks/drawing/axis.ts';
 import { readAt } from '../../notebooks/drawing/alongOption.ts';
 import { sheetIn } from '../../notebooks/drawing/elevation.ts';
 import { textWidth, wrapText } from '../../notebooks/drawing/lettering.ts';
@@ -164,6 +165,31 @@ describe('figures as printed', () => {
   it('moneyUnit(currency, largest) turns to thousands below a million', () => {
     expect(moneyUnit('EUR', 11.5e6)).toEqual({ per: 1e6, label: 'M€' });
     expect(moneyUnit('CHF', 4e5)).toEqual({ per: 1e3, label: 'kCHF' });
+  });
+});
+
+describe('axis of costs', () => {
+  const twoFigures = (tick: number): boolean => Number(tick.toPrecision(2)) === tick;
+
+  it('marks even steps that two figures can print', () => {
+    const costs = [9.1e6, 11.4e6];
+    expect(linearAxis(costs, 0, 600, 7).ticks.every(twoFigures)).toBe(false);
+    expect(costAxis(costs, 0, 600, 7).ticks).toEqual([10e6, 11e6]);
+  });
+
+  it('keeps its marks and the same places where two figures print them already', () => {
+    const costs = [21e6, 64e6];
+    expect(costAxis(costs, 0, 600, 7).ticks).toEqual(linearAxis(costs, 0, 600, 7).ticks);
+    expect(costAxis(costs, 0, 600, 7).x(40e6)).toBe(linearAxis(costs, 0, 600, 7).x(40e6));
+  });
+
+  it('marks nothing that is finer than a cost is known', () => {
+    for (const costs of [
+      [12.31e6, 12.34e6],
+      [10.2e6, 10.9e6],
+      [980e3, 1.04e6],
+    ])
+      expect(costAxis(costs, 0, 600, 7).ticks.filter((tick) => !twoFigures(tick))).toEqual([]);
   });
 });
 
