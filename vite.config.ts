@@ -46,6 +46,7 @@ const longest = [
   'properties/arrange',
   'examples',
   'explain/manual',
+  'appraise/limitingSpan',
   'appraise/abutmentWindows',
   'appraise/memory',
   'appraise/appraise',
