@@ -6,7 +6,7 @@ import { colours, letters, pens } from '../drawing/ink.ts';
 import { interval } from '../drawing/interval.ts';
 import { label } from '../drawing/label.ts';
 import { textWidth, wrapText } from '../drawing/lettering.ts';
-import { optionTitle } from '../drawing/optionWords.ts';
+import { shortTitle } from '../drawing/optionWords.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el, g, num } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
@@ -188,13 +188,7 @@ export function costIntervals(input: CostIntervalsInput): Piece {
       const half = textWidth(likely, letters.table, 600) / 2;
       return g(
         { class: 'option' },
-        rowHead(
-          option,
-          y,
-          ink,
-          input.reference,
-          narrow ? undefined : optionTitle(option).split(', ').slice(0, 2).join(', '),
-        ),
+        rowHead(option, y, ink, input.reference, narrow ? undefined : shortTitle(option)),
         label(lowAt + aside(lowAt - textWidth(low, letters.drawing), lowAt, 'left'), y + 4, low, {
           anchor: 'end',
           fill: colours.second,

@@ -15,7 +15,7 @@ import { spanPaths, spansOf } from '../drawing/alongOption.ts';
 import type { Asked } from '../drawing/asked.ts';
 import { dataFigure, ofOption, perM2Of, rangeOf, withinOf } from '../drawing/asked.ts';
 import type { Paper } from '../drawing/ink.ts';
-import { optionTitle } from '../drawing/optionWords.ts';
+import { shortTitle } from '../drawing/optionWords.ts';
 import type { Piece } from '../drawing/piece.ts';
 import { el } from '../drawing/piece.ts';
 import { sheet } from '../drawing/sheet.ts';
@@ -124,7 +124,7 @@ export function ranking(input: RankingInput): Piece {
           'tr',
           { class: classes, 'data-option': option.number },
           el('td', { class: 'mark' }, optionMark(option, reference, input.paper)),
-          el('th', { scope: 'row', class: 'name' }, optionTitle(option).split(', ').slice(0, 2).join(', ')),
+          el('th', { scope: 'row', class: 'name' }, shortTitle(option)),
           el(
             'td',
             {

@@ -10,7 +10,7 @@ import { colours, letters, pens } from './ink.ts';
 import { interval } from './interval.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
-import { mainSpan, optionTitle } from './optionWords.ts';
+import { formBuilt, mainSpan } from './optionWords.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { sheet } from './sheet.ts';
@@ -35,7 +35,7 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
   const height = figureY + 14;
   const { p10, p50, p90 } = option.cost;
   const within = input.standing.within[option.number];
-  const name = optionTitle(option).split(',')[0] ?? '';
+  const name = formBuilt(option);
   const second: { size: number; fill: string } = { size: letters.table, fill: colours.second };
   const piece = chosenRow(shared, option, top, height, [
     rowNumber(shared, option, 12, titleY - 6, 11.5),

@@ -1,7 +1,7 @@
 import { chainage, length, level } from '../format.ts';
 import { choicesSaid } from '../forms/formChoices.ts';
 import { formLooks } from '../forms/formLook.ts';
-import type { AppraisedOption, Design, FormId, Site } from '../model.ts';
+import type { AppraisedOption, Design, FormId, MethodId, Site } from '../model.ts';
 import { spansOf, roadTop, structureTop } from './alongOption.ts';
 
 /** Whether an option's main unit is deeper at its supports than at midspan. */
@@ -11,7 +11,10 @@ const isHaunched = (option: AppraisedOption): boolean => option.depthM.support >
 export const onWalls = (designs: readonly Design[]): boolean =>
   designs.some(({ walls }) => walls !== undefined && walls.length > 0);
 
-/** Heading of an option: the form, haunched where it is, and the form of its approaches where that is another. */
+/** Methods that are not the usual one of any form, as they are said of an option. */
+const madeBy: Partial<Record<MethodId, string>> = { launch: 'launched', 'float-in': 'floated in' };
+
+/** Heading of an option: the form, how it is built where that is not usual, haunched where it is, and the form of its approaches where that is another. */
 export function optionTitle(option: AppraisedOption): string {
   const look = formLooks[option.form];
   const haunchSaid =
@@ -24,8 +27,24 @@ export function optionTitle(option: AppraisedOption): string {
   const beside = [...approaches].map(
     (form) => `${formLooks[form].short.charAt(0).toLowerCase()}${formLooks[form].short.slice(1)} approaches`,
   );
-  return [look.name, ...(isHaunched(option) && !haunchSaid ? ['haunched'] : []), ...beside].join(', ');
+  const { [option.method]: method } = madeBy;
+  return [
+    look.name,
+    ...(method === undefined ? [] : [method]),
+    ...(isHaunched(option) && !haunchSaid ? ['haunched'] : []),
+    ...beside,
+  ].join(', ');
 }
+
+/** The form alone, short where it is also said how it is built. */
+export const formBuilt = ({ form, method }: Pick<AppraisedOption, 'form' | 'method'>): string => {
+  const { name, short } = formLooks[form];
+  return method in madeBy ? `${short}, ${madeBy[method]}` : (name.split(', ')[0] ?? name);
+};
+
+/** The heading where there is little room: the form, with how it is built or else the first that is said of it. */
+export const shortTitle = (option: AppraisedOption): string =>
+  option.method in madeBy ? formBuilt(option) : optionTitle(option).split(', ').slice(0, 2).join(', ');
 
 /** What is worth knowing of an option beside its spans: its depth, what stands above the road, how the road moves. */
 export function optionNote(site: Site, option: AppraisedOption): string {

@@ -1,5 +1,6 @@
 import { expect, it } from 'vitest';
-import { optionNote } from '../../notebooks/drawing/optionWords.ts';
+import { formModule, sizeableForms } from '../../lib/index.ts';
+import { formBuilt, optionNote } from '../../notebooks/drawing/optionWords.ts';
 import { example } from '../explain/contexts.ts';
 
 it('optionNote(option) says how a box is made where it is not the usual way', () => {
@@ -20,4 +21,14 @@ it('optionNote(option) says how a box is made where it is not the usual way', ()
   expect(note({ castInPiers: 2 })).toContain(', cast in with 2 piers');
   expect(note({ castInPiers: 1 })).toContain(', cast in with one pier');
   expect(note({})).not.toMatch(/concrete|box/u);
+});
+
+it('formBuilt(option) says a method that is not the usual one of its form, and no other', () => {
+  expect(formBuilt({ form: 'concrete-box', method: 'launch' })).toBe('Concrete box, launched');
+  expect(formBuilt({ form: 'concrete-box', method: 'falsework' })).toBe('Concrete box');
+  expect(formBuilt({ form: 'truss', method: 'float-in' })).toBe('Truss, floated in');
+  for (const form of sizeableForms) {
+    const [usual] = formModule(form).methods;
+    expect(formBuilt({ form, method: usual }), form).not.toMatch(/launched|floated/u);
+  }
 });

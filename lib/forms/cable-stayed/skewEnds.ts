@@ -1,6 +1,7 @@
 import type { Check, UnitTask } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
 import { aheadM } from '../common/skewPlanes.ts';
+import { skewWords } from '../common/skewWords.ts';
 import { sizeFloor, type Floor, type FloorCase } from '../floor/sizeFloor.ts';
 import type { SizedPylon } from './sizePylon.ts';
 
@@ -42,6 +43,6 @@ export function skewWarnings(
   const overLegsM = planesM + Math.max(...pylons.map(({ widthM }) => widthM));
   const longerM = aheadM(overLegsM, skewDeg);
   return [
-    `Skew ${Number(skewDeg.toFixed(1))} degrees: pylons, stays and cross-girders are square to the road, only the ends of the deck follow the supports. Legs ${overLegsM.toFixed(1)} m over all clear an obstacle on this skew by a main span ${longerM.toFixed(1)} m longer than their axis asks for (${((100 * longerM) / mainSpanM).toFixed(0)} % of it); where the span was set along the axis, add it. One edge girder ends ${aheadM(planesM, skewDeg).toFixed(1)} m before the other: the end bays are sized by their mean.`,
+    `${skewWords(skewDeg)}: pylons, stays and cross-girders are square to the road, only the ends of the deck follow the supports. Legs ${overLegsM.toFixed(1)} m over all clear an obstacle on this skew by a main span ${longerM.toFixed(1)} m longer than their axis asks for (${((100 * longerM) / mainSpanM).toFixed(0)} % of it); where the span was set along the axis, add it. One edge girder ends ${aheadM(planesM, skewDeg).toFixed(1)} m before the other: the end bays are sized by their mean.`,
   ];
 }

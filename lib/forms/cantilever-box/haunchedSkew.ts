@@ -26,6 +26,10 @@ export function haunchedSkew(
 ): HaunchedSkew {
   const { task, superimposed, traffic } = model;
   const { skewDeg = 0 } = task;
+  if (skewDeg === 0) {
+    const none = task.spansM.map(() => 0);
+    return { lastingKNm: none, trafficKNm: none };
+  }
   const deck = twistedDeck(model, sections);
   const laterKNm = weight.lastingKNm.map(
     (own, i) => own - weight.cantileverKNm[i]! + superimposed.momentKNm[i]!,

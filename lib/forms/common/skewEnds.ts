@@ -1,12 +1,11 @@
 import type { Design, UnitTask } from '../../model/index.ts';
 import { carries } from './carries.ts';
 import { aheadM } from './skewPlanes.ts';
+import { skewWords } from './skewWords.ts';
 
 /** Figures of a box on skew ends: greatest design torque, kNm, and what it shifts from the acute bearing to the obtuse, kN; none on square ends. */
 export const skewFigures = (torqueKNm: number, apartM: number): Record<string, number> =>
   torqueKNm > 0 ? { skewTorqueKNm: torqueKNm, skewBearingKN: torqueKNm / apartM } : {};
-
-const degrees = (skewDeg: number): string => `Skew ${Number(skewDeg.toFixed(1))} degrees`;
 
 /**
  * A box on a skew. At its piers two bearings, or what is cast in, stand square to the road under square diaphragms; at its
@@ -25,7 +24,7 @@ export function withSkewEnds(task: UnitTask, size: (task: UnitTask) => Design): 
       ...skew,
       warnings: [
         ...skew.warnings,
-        `${degrees(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(skewTorqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(skewBearingKN / 1e3).toFixed(1)} MN more and the acute by as much less; bearings are priced at their mean.`,
+        `${skewWords(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(skewTorqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(skewBearingKN / 1e3).toFixed(1)} MN more and the acute by as much less; bearings are priced at their mean.`,
       ],
     };
   const plain = size(square);
@@ -34,7 +33,7 @@ export function withSkewEnds(task: UnitTask, size: (task: UnitTask) => Design): 
     task,
     warnings: [
       ...plain.warnings,
-      `${degrees(skewDeg)}: of two bearings along a skew abutment the acute would lift (${(100 * lifts.utilisation).toFixed(0)} % of its limit), so the box is sized with all its bearings square to the road. Its ends then need ${aheadM(task.deck.widthM, skewDeg).toFixed(1)} m of slab or sill beyond them at one edge, which is not measured; ends along the skew would have to be tied down.`,
+      `${skewWords(skewDeg)}: of two bearings along a skew abutment the acute would lift (${(100 * lifts.utilisation).toFixed(0)} % of its limit), so the box is sized with all its bearings square to the road. Its ends then need ${aheadM(task.deck.widthM, skewDeg).toFixed(1)} m of slab or sill beyond them at one edge, which is not measured; ends along the skew would have to be tied down.`,
     ],
   };
 }

@@ -1,4 +1,5 @@
 import type { UnitTask } from '../../model/index.ts';
+import { skewWords } from './skewWords.ts';
 import { cosineOfSkew } from '../../site/skew.ts';
 
 /*
@@ -30,6 +31,6 @@ export function skewPlanesWarnings(
   // Half a sine over the span, its rise over the offset: at most the whole deflection.
   const apartM = deflectionM * Math.sin(Math.PI * Math.min(ahead / spanM, 0.5));
   return [
-    `Skew ${Number(skewDeg.toFixed(1))} degrees: cross-girders run along the supports, ${alongSkewM(planesM, skewDeg).toFixed(1)} m long; one plane stands ${ahead.toFixed(1)} m ahead of the other. Cross-girders square to the road would join points that part by ${(1000 * apartM).toFixed(0)} mm under traffic near the supports. What the floor carries to the obtuse corners by its own stiffness is left out: analyse it as a grillage.`,
+    `${skewWords(skewDeg)}: cross-girders run along the supports, ${alongSkewM(planesM, skewDeg).toFixed(1)} m long; one plane stands ${ahead.toFixed(1)} m ahead of the other. Cross-girders square to the road would join points that part by ${(1000 * apartM).toFixed(0)} mm under traffic near the supports. What the floor carries to the obtuse corners by its own stiffness is left out: analyse it as a grillage.`,
   ];
 }

@@ -3,7 +3,7 @@ import { boxData } from './boxData.ts';
 import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { Tendons } from './findTendons.ts';
-import { youngTensionMPa, type CastOf } from './freshTension.ts';
+import { freshTension, youngTensionMPa, type CastOf } from './freshTension.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 
 /** Greatest stress of the concrete over its limit, with the stress, MPa. */
@@ -52,7 +52,13 @@ export function boxCompressions(
   };
   const nil: StressUse = { use: 0, stressMPa: 0, limitMPa: limits.total };
   const young = youngTensionMPa(model);
-  const out = { pierSoffit: nil, spanSoffit: nil, top: nil, freshTension: { ...nil, limitMPa: young } };
+  const freshMPa = freshTension(sections, own, tendons.straightInitialKN)(tendons, tendons.initialKN);
+  const out = {
+    pierSoffit: nil,
+    spanSoffit: nil,
+    top: nil,
+    freshTension: { use: freshMPa / young, stressMPa: freshMPa, limitMPa: young },
+  };
   const note = (place: keyof typeof out, stressKPa: number, limitMPa: number): void => {
     const use = stressKPa / 1e3 / limitMPa;
     if (use > out[place].use) out[place] = { use, stressMPa: stressKPa / 1e3, limitMPa };
@@ -73,8 +79,6 @@ export function boxCompressions(
     note(soffit, axial - lasting / lowW, limits.permanent);
     note(soffit, axial - (lasting + most.momentMinKNm[i]!) / lowW, limits.total);
     note(soffit, freshAxial - fresh / lowW, limits.transfer);
-    note('freshTension', -(freshAxial - fresh / lowW), young);
-    note('freshTension', -(freshAxial + fresh / topW), young);
     note('top', axial + lasting / topW, limits.permanent);
     note('top', axial + (lasting + most.momentMaxKNm[i]!) / topW, limits.total);
     note('top', freshAxial + fresh / topW, limits.transfer);

@@ -1,8 +1,8 @@
 import type { OwnWeight } from './boxLoads.ts';
 import { boxData } from './boxData.ts';
 import type { BoxModel } from './boxModel.ts';
-import { mayBeStressed } from './freshTension.ts';
-import { leastForce, type Drape, type DrapeAsked } from './leastForce.ts';
+import { freshTension, youngTensionMPa } from './freshTension.ts';
+import { fewestStrands, leastForce, type Drape, type DrapeAsked } from './leastForce.ts';
 import type { LaunchedDeck } from './launchedDeck.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { serviceNeed } from './serviceNeed.ts';
@@ -83,7 +83,8 @@ export function findTendons(
     return Math.min(most, Math.max(boxData.tendons.sizes[0]!.strands, wanted));
   };
   const service = serviceNeed(model, sections, own, group, straightKN);
-  const mayStress = mayBeStressed(model, sections, own, straightInitialKN);
+  const fresh = freshTension(sections, own, straightInitialKN);
+  const youngMPa = youngTensionMPa(model);
   // A deeper compression zone asks for more force and that deepens it again: half the way is steady.
   const steadiedKN = before ? (before.forceKN + (before.steadiedKN || before.forceKN)) / 2 : 0;
   const straightM2 = straightStrands * model.strandM2;
@@ -97,12 +98,12 @@ export function findTendons(
         const forService = service(at, enough);
         return forService >= enough ? forService : Math.max(forService, ultimate(at, enough));
       },
-      bears: (drape, forceKN) => mayStress(line(drape), strandsFor(forceKN) * webs * initialKN),
+      bears: (drape, forceKN) => fresh(line(drape), strandsFor(forceKN) * webs * initialKN) <= youngMPa,
     };
-    const { drape, forceKN } = leastForce(asked, spansM.length, before?.drape ?? null);
-    return [{ way, drape, forceKN, meanShare: shapes.meanShare, line }];
+    const found = leastForce(asked, spansM.length, before?.drape ?? null);
+    return [{ ...found, way, meanShare: shapes.meanShare, line }];
   });
-  const found = tried.reduce((a, b) => (b.forceKN * b.meanShare < a.forceKN * a.meanShare ? b : a));
+  const found = fewestStrands(tried);
   const { depthM, eccentricityM, parasiticM, share } = found.line(found.drape);
 
   const bend = (strands: number): [BendingUse, BendingUse] =>

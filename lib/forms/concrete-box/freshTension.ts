@@ -22,28 +22,27 @@ export function youngTensionMPa(made: CastOf): number {
   return weakerShare(made) * concrete(made.standardId, strengthAtTransfer * made.concrete.fckMPa).fctmMPa;
 }
 
-/** Whether both faces stay uncracked under own weight and tendons stressed to a force, kN, along a line, before any lasting loss. */
-export type MayBeStressed = (line: TendonLine, initialKN: number) => boolean;
+/** Greatest tension of either face under own weight and tendons stressed to a force, kN, along a line, before any lasting loss, MPa; 0 where all is pressed. */
+export type FreshTension = (line: Omit<TendonLine, 'depthM'>, initialKN: number) => number;
 
 /**
- * The limit that the day of stressing sets to tendons.
+ * What the day of stressing does to the faces of a deck.
  * @param straightKN force of centred tendons stressed with them, kN
  */
-export function mayBeStressed(
-  made: CastOf,
+export function freshTension(
   sections: Pick<SectionsAlong, 'areaM2' | 'inertiaM4' | 'topM' | 'lowM' | 'topLag' | 'lowLag'>,
   own: Pick<OwnWeight, 'effects'>,
   straightKN: number,
-): MayBeStressed {
-  const youngKPa = youngTensionMPa(made) * 1e3;
+): FreshTension {
   const low = sections.inertiaM4.map((inertia, i) => (sections.lowM[i]! * sections.lowLag[i]!) / inertia);
   const top = sections.inertiaM4.map((inertia, i) => (sections.topM[i]! * sections.topLag[i]!) / inertia);
   return ({ share, eccentricityM, parasiticM }, initialKN) => {
+    let mostKPa = 0;
     for (let i = 0; i < low.length; i++) {
       const pressed = (share[i]! * initialKN + straightKN) / sections.areaM2[i]!;
       const moment = own.effects.momentKNm[i]! + initialKN * (parasiticM[i]! - share[i]! * eccentricityM[i]!);
-      if (Math.max(moment * low[i]!, -moment * top[i]!) - pressed > youngKPa) return false;
+      mostKPa = Math.max(mostKPa, moment * low[i]! - pressed, -moment * top[i]! - pressed);
     }
-    return true;
+    return mostKPa / 1e3;
   };
 }

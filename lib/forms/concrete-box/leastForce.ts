@@ -16,8 +16,8 @@ export interface DrapeAsked {
   readonly bears: (drape: Drape, forceKN: number) => boolean;
 }
 
-/** A drape with the force it needs, and whether the concrete bears that. */
-interface Tried {
+/** A drape with the force it needs, and whether the concrete bears that on the day of stressing. */
+export interface LeastForce {
   readonly drape: Drape;
   readonly forceKN: number;
   readonly isBorne: boolean;
@@ -31,15 +31,11 @@ interface Tried {
  * @param start drape to begin with, null for the coarse grid
  * @param spans number of spans; shapes that the unit does not have stay at 1
  */
-export function leastForce(
-  asked: DrapeAsked,
-  spans: number,
-  start: Drape | null,
-): { readonly drape: Drape; readonly forceKN: number } {
+export function leastForce(asked: DrapeAsked, spans: number, start: Drape | null): LeastForce {
   const known = start && tried(asked, start);
   if (known?.isBorne === true) return descended(asked, spans, known, startedStep);
   const whole = [1] as const;
-  let best: Tried[] = [];
+  let best: LeastForce[] = [];
   for (const a of coarse)
     for (const b of spans > 2 ? coarse : whole)
       for (const c of spans > 1 ? coarse : whole) {
@@ -53,7 +49,7 @@ export function leastForce(
 }
 
 /** Steps from a drape to a better one beside it until there is none, then with half the step. */
-function descended(asked: DrapeAsked, spans: number, from: Tried, firstStepOf: number): Tried {
+function descended(asked: DrapeAsked, spans: number, from: LeastForce, firstStepOf: number): LeastForce {
   let best = from;
   for (let step = firstStepOf; step > finest;) {
     const before = best;
@@ -68,17 +64,27 @@ function descended(asked: DrapeAsked, spans: number, from: Tried, firstStepOf: n
 }
 
 /** A drape tried; null where it is no better than one that is known. */
-function tried(asked: DrapeAsked, drape: Drape): Tried;
-function tried(asked: DrapeAsked, drape: Drape, known: Tried | undefined): Tried | null;
-function tried({ need, bears }: DrapeAsked, drape: Drape, known?: Tried): Tried | null {
+function tried(asked: DrapeAsked, drape: Drape): LeastForce;
+function tried(asked: DrapeAsked, drape: Drape, known: LeastForce | undefined): LeastForce | null;
+function tried({ need, bears }: DrapeAsked, drape: Drape, known?: LeastForce): LeastForce | null {
   const forceKN = need(drape, known?.isBorne === true ? known.forceKN : Infinity);
   if (known?.isBorne === true && !(forceKN < known.forceKN)) return null;
   const next = { drape, forceKN, isBorne: forceKN < Infinity && bears(drape, forceKN) };
   return known && !isBetter(next, known) ? null : next;
 }
 
-const isBetter = (a: Tried, b: Tried): boolean =>
+const isBetter = (a: LeastForce, b: LeastForce): boolean =>
   a.isBorne === b.isBorne ? a.forceKN < b.forceKN : a.isBorne;
+
+/** Of ways to share strands out among the spans the one with the fewest along the deck of those that are borne, of all where none is. */
+export function fewestStrands<T extends LeastForce & { readonly meanShare: number }>(ways: readonly T[]): T {
+  const along = ({ isBorne, forceKN, meanShare, drape }: T): LeastForce => ({
+    drape,
+    isBorne,
+    forceKN: forceKN * meanShare,
+  });
+  return ways.reduce((a, b) => (isBetter(along(b), along(a)) ? b : a));
+}
 
 /** A share and its neighbours within 0 and 1, each once. */
 function around(share: number, step: number): number[] {

@@ -1,6 +1,7 @@
-import { concrete, materials } from '../../actions/index.ts';
+import { materials } from '../../actions/index.ts';
 import type { WallLoad } from '../../model/index.ts';
 import { boxData } from '../concrete-box/boxData.ts';
+import { youngTensionMPa } from '../concrete-box/freshTension.ts';
 import { tendonStress, type TendonStress } from '../concrete-box/tendonForce.ts';
 import { slabDeckData } from '../slab/slabDeckData.ts';
 import { combinations, worstMoment } from './combine.ts';
@@ -214,7 +215,7 @@ function stressesOf(
 ): Pick<FrameTendons, 'compression' | 'freshTension'> {
   const { fckMPa } = model.concrete;
   const { total, transfer, strengthAtTransfer } = boxData.compression;
-  const young = concrete(model.standardId, strengthAtTransfer * fckMPa).fctmMPa;
+  const young = youngTensionMPa(model);
   const all = combinations(model, traffic, 'characteristic', null);
   let compression = { stressMPa: 0, limitMPa: total * fckMPa };
   let freshTension = { stressMPa: 0, limitMPa: young };

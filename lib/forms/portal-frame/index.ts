@@ -2,6 +2,7 @@ import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { curveWarning } from '../common/curveWarning.ts';
+import { skewWords } from '../common/skewWords.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { frameChecks } from './frameChecks.ts';
@@ -50,7 +51,7 @@ function size(task: UnitTask): Design {
   warnings.push(...curveWarning(task, 'all its figures are those of a straight deck.'));
   if ((task.skewDeg ?? 0) > 0)
     warnings.push(
-      `Skew ${Number(task.skewDeg!.toFixed(1))} degrees: walls are as long as the skew makes them; the deck spans as if square, and what it carries at its obtuse corners and the twist of skew earth pressure are left out.`,
+      `${skewWords(task.skewDeg!)}: walls are as long as the skew makes them; the deck spans as if square, and what it carries at its obtuse corners and the twist of skew earth pressure are left out.`,
     );
   if (task.clearUnderM === undefined)
     warnings.push(

@@ -1,6 +1,6 @@
 import { materials } from '../../actions/index.ts';
-import { mayBeStressed } from '../concrete-box/freshTension.ts';
-import { leastForce, type Drape } from '../concrete-box/leastForce.ts';
+import { freshTension, youngTensionMPa } from '../concrete-box/freshTension.ts';
+import { fewestStrands, leastForce, type Drape } from '../concrete-box/leastForce.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { serviceNeed, type ServiceSections } from '../concrete-box/serviceNeed.ts';
 import { tendonStress, type TendonStress } from '../concrete-box/tendonForce.ts';
@@ -55,6 +55,7 @@ export function findSlabTendons(model: SlabModel, atLeast = 0): SlabTendons {
   const { spansM } = task;
   const sections = sectionsOf(model);
   const shapes = sharePowers(spansM).map((power) => tendonShapes(spansM, beam, power));
+  const youngMPa = youngTensionMPa(model);
   const strandM2 = boxData.strandAreaMm2[model.standardId] * 1e-6;
   const { largest, mostCount } = room(model);
   const mostStrands = mostCount * largest.strands;
@@ -69,7 +70,7 @@ export function findSlabTendons(model: SlabModel, atLeast = 0): SlabTendons {
     const axialMPa = (strands * strandM2 * jackMPa * (1 - boxData.losses.longTerm)) / model.span.areaM2;
     const stress = tendonStress(model, sagM, Math.min(axialMPa, model.concrete.fckMPa / 2));
     const need = serviceNeed(model, sections, model.own, { heightM: ductM }, 0, slabDeckData.gradient);
-    const mayStress = mayBeStressed(model, sections, model.own, 0);
+    const fresh = freshTension(sections, model.own, 0);
     const perStrandKN = stress.lastingMPa * strandM2 * 1e3;
     const strandsFor = (forceKN: number): number => {
       const wanted = Math.ceil(forceKN / perStrandKN - 1e-6);
@@ -80,12 +81,12 @@ export function findSlabTendons(model: SlabModel, atLeast = 0): SlabTendons {
       const asked = {
         need: (drape: Drape, enough: number) => need(line(drape), enough),
         bears: (drape: Drape, forceKN: number) =>
-          mayStress(line(drape), strandsFor(forceKN) * strandM2 * stress.initialMPa * 1e3),
+          fresh(line(drape), strandsFor(forceKN) * strandM2 * stress.initialMPa * 1e3) <= youngMPa,
       };
       const found = leastForce(asked, spansM.length, null);
       return { ...found, line, meanShare: shape.meanShare };
     });
-    const found = tried.reduce((a, b) => (b.forceKN * b.meanShare < a.forceKN * a.meanShare ? b : a));
+    const found = fewestStrands(tried);
     const next = strandsFor(found.forceKN);
     const settled = layer(model, next).ductM === ductM;
     if (pass < passes && !(settled && Math.abs(next - strands) <= 0.01 * next)) {

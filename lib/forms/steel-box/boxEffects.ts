@@ -148,11 +148,13 @@ export function boxEffects(
     ...torques(
       model,
       designKNm,
-      skewTorques(
-        twistedDeck(model, plates),
-        skewMoments(model, own, superimposed, traffic),
-        task.skewDeg ?? 0,
-      ),
+      (task.skewDeg ?? 0) === 0
+        ? task.spansM.map(() => 0)
+        : skewTorques(
+            twistedDeck(model, plates),
+            skewMoments(model, own, superimposed, traffic),
+            task.skewDeg!,
+          ),
     ),
     rangeKNm: before?.rangeKNm ?? lorryRange(model, beam),
   };

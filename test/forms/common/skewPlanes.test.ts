@@ -6,6 +6,7 @@ import { halfThrough } from '../../../lib/forms/half-through/index.ts';
 import { truss } from '../../../lib/forms/truss/index.ts';
 import type { Design, UnitTask } from '../../../lib/model/index.ts';
 import { girderTask } from '../composite-i/cases.ts';
+import { floorDeck } from '../floor/cases.ts';
 
 describe('two planes on skew supports', () => {
   it('have cross-girders of D / cos and bearings D tan ahead of each other, either way', () => {
@@ -26,20 +27,10 @@ describe('two planes on skew supports', () => {
   });
 });
 
-const deck = {
-  widthM: 12,
-  carriagewayM: 9,
-  carriagewayOffsetM: 0,
-  lanes: 2,
-  footwayM: 2,
-  surfacingM: 0.09,
-  superimposedKNm: 40,
-};
-
 it('sizeFloor(skew) bends its cross-girders by 1 / cos more', () => {
   const floor = {
     standard: 'lm1',
-    deck,
+    deck: floorDeck,
     planesM: 13,
     crossSpacingM: 5,
     depthM: 1.4,
@@ -71,7 +62,7 @@ describe.each([
   ['half-through', halfThrough, [30], 1.2],
 ] as const)('size(%s) of a skew deck', (form, module, spansM, depthM) => {
   const at = (skew: Partial<UnitTask>): Design =>
-    module.size({ ...girderTask(spansM, depthM, skew), deck, form, method: 'crane' });
+    module.size({ ...girderTask(spansM, depthM, skew), deck: floorDeck, form, method: 'crane' });
 
   it('is that of a square one to the last digit at 0', () => {
     const { task: _square, ...square } = at({});
@@ -97,7 +88,7 @@ it('a skew truss has more bracing: portals and struts along the supports, one di
   const bracing = (skewDeg: number): number => {
     const design = truss.size({
       ...girderTask([80], 1.5, { skewDeg }),
-      deck,
+      deck: floorDeck,
       form: 'truss',
       method: 'crane',
     });

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { concrete } from '../../../lib/actions/index.ts';
 import { bendingCapacity } from '../../../lib/forms/concrete-box/bendingCapacity.ts';
 import { boxModel } from '../../../lib/forms/concrete-box/boxModel.ts';
-import { leastForce, type Drape } from '../../../lib/forms/concrete-box/leastForce.ts';
+import { fewestStrands, leastForce, type Drape } from '../../../lib/forms/concrete-box/leastForce.ts';
 import { serviceNeed } from '../../../lib/forms/concrete-box/serviceNeed.ts';
 import { tendonStress } from '../../../lib/forms/concrete-box/tendonForce.ts';
 import { tendonGroup } from '../../../lib/forms/concrete-box/tendonGroup.ts';
@@ -203,5 +203,20 @@ describe('serviceNeed()', () => {
   it('judges low tendons by the concrete round them', () => {
     // e = 0.35: 150 mm below is the face: M / W = P (1 / A + e / W), 6000 = 0.9 P (0.5 + 1.05).
     expect(needAt(0.35, 2000)).toBeCloseTo(6000 / 0.9 / 1.55, 6);
+  });
+});
+
+describe('fewestStrands()', () => {
+  const way = (forceKN: number, meanShare: number, isBorne: boolean) => ({
+    drape: [1, 1, 1] as const,
+    forceKN,
+    meanShare,
+    isBorne,
+  });
+  it('takes the fewest along the deck of what the concrete bears, of all where it bears none', () => {
+    const ways = [way(900, 1, false), way(1000, 1, true), way(1100, 0.8, true)];
+    expect(fewestStrands(ways)).toBe(ways[2]);
+    expect(fewestStrands(ways.slice(0, 2))).toBe(ways[1]);
+    expect(fewestStrands([way(900, 1, false), way(1000, 0.8, false)]).forceKN).toBe(1000);
   });
 });

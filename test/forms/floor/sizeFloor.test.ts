@@ -1,17 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { sizeFloor, type FloorCase } from '../../../lib/forms/floor/sizeFloor.ts';
+import { floorDeck } from './cases.ts';
 
 const floor: FloorCase = {
   standard: 'lm1',
-  deck: {
-    widthM: 12,
-    carriagewayM: 9,
-    carriagewayOffsetM: 0,
-    lanes: 2,
-    footwayM: 2,
-    surfacingM: 0.09,
-    superimposedKNm: 40,
-  },
+  deck: floorDeck,
   planesM: 13,
   crossSpacingM: 7,
   depthM: 1.4,

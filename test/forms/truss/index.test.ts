@@ -2,19 +2,12 @@ import { describe, expect, it } from 'vitest';
 import { quantityOf } from '../../../lib/forms/common/measured.ts';
 import { truss } from '../../../lib/forms/truss/index.ts';
 import type { UnitTask } from '../../../lib/model/index.ts';
+import { floorDeck } from '../floor/cases.ts';
 
 const task: UnitTask = {
   form: 'truss',
   spansM: [80],
-  deck: {
-    widthM: 12,
-    carriagewayM: 9,
-    carriagewayOffsetM: 0,
-    lanes: 2,
-    footwayM: 2,
-    surfacingM: 0.09,
-    superimposedKNm: 40,
-  },
+  deck: floorDeck,
   standard: 'lm1',
   planRadiusM: Infinity,
   method: 'crane',

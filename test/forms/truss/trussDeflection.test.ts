@@ -4,21 +4,14 @@ import { trussDeflection } from '../../../lib/forms/truss/trussDeflection.ts';
 import { trussSpan } from '../../../lib/forms/truss/trussSpan.ts';
 import { trussForces } from '../../../lib/mechanics/index.ts';
 import { wholeTruss } from './wholeTruss.ts';
+import { floorDeck } from '../floor/cases.ts';
 
 describe('trussDeflection(truss, standard, traffic)', () => {
   it('agrees with the displacement method on the sized members', () => {
     const span = trussSpan(90, {
       form: 'truss',
       spansM: [90],
-      deck: {
-        widthM: 12,
-        carriagewayM: 9,
-        carriagewayOffsetM: 0,
-        lanes: 2,
-        footwayM: 2,
-        surfacingM: 0.09,
-        superimposedKNm: 40,
-      },
+      deck: floorDeck,
       standard: 'lm1',
       planRadiusM: Infinity,
       method: 'crane',
