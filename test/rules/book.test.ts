@@ -37,6 +37,19 @@ describe('rules of data/rules', () => {
         expect(text.replace(/\{[^}]*\}/gu, ''), rule.id).not.toMatch(/\d/u);
   });
 
+  it('a reason names the limit of a fact only where all conditions together hold it against one', () => {
+    const heldTogether = (condition: Condition, fact: string): number => {
+      if ('all' in condition) return condition.all.reduce((sum, one) => sum + heldTogether(one, fact), 0);
+      if ('any' in condition) return Math.max(...condition.any.map((one) => heldTogether(one, fact)));
+      if ('not' in condition) return heldTogether(condition.not, fact);
+      return condition.fact === fact ? 1 : 0;
+    };
+    for (const rule of rules)
+      for (const text of [rule.reason, rule.otherwise?.reason ?? ''])
+        for (const [, fact] of text.matchAll(/\{limit:(\w+)\}/gu))
+          expect(heldTogether(rule.condition, fact!), `${rule.id}: ${fact}`).toBe(1);
+  });
+
   it('reasons avoid words that promise', () => {
     for (const rule of rules)
       expect(`${rule.title} ${rule.reason}`, rule.id).not.toMatch(
