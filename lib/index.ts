@@ -35,7 +35,7 @@ export {
   type BuiltSpans,
 } from './bands/builtSpans.ts';
 export { spanSources, type SpanSource } from './bands/spanSources.ts';
-export { changedOption, draftDecision, issuedOn, levelWith, sinceIssued } from './decide/index.ts';
+export { afterEdit, changedOption, draftDecision, issuedOn, levelWith, sinceIssued } from './decide/index.ts';
 export { depthGuidance, type DepthGuidance } from './depthGuidance.ts';
 export { guide, type Guide, type GuideForm, type GuideTask } from './guide.ts';
 export { sentence } from './messages/index.ts';
@@ -56,12 +56,17 @@ export {
 export {
   asPriceDate,
   askedOf,
+  assumedAgain,
+  confirmed,
   fillGround,
   fingerprint,
   groundLabels,
+  isAssumed,
   parseStudy,
   readDraft,
   readStudy,
+  startValueWords,
+  startValues,
   studyVersion,
   writeStudy,
 } from './study/index.ts';

@@ -31,10 +31,14 @@ function optionJson(option: AppraisedOption): object {
   };
 }
 
-/** The appraisal as the command line prints it: plain JSON, figures at six significant places, dearest last. */
-export function appraisalJson(appraisal: Appraisal): object {
+/**
+ * The appraisal as the command line prints it: plain JSON, figures at six significant places, dearest last.
+ * @param unconfirmed names of the start values of its study that nobody has confirmed
+ */
+export function appraisalJson(appraisal: Appraisal, unconfirmed: readonly string[]): object {
   return rounded({
     study: appraisal.study,
+    startValuesNotConfirmed: unconfirmed,
     options: appraisal.options.map(optionJson),
     currency: appraisal.currency,
     dropped: appraisal.dropped,

@@ -1,6 +1,7 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { resolve } from 'node:path';
 import { appraise } from '../appraise.ts';
+import { startValues, startValueWords } from '../study/index.ts';
 import { appraisalJson } from './appraisalJson.ts';
 import { readFlags } from './flags.ts';
 import { refuse } from './refusal.ts';
@@ -34,9 +35,12 @@ export function appraiseCommand(argv: readonly string[]): Said {
       },
     ]);
   }
-  const json = jsonText(appraisalJson(appraise(studyFile(file))));
-  if (out === undefined) return { out: json };
+  const study = studyFile(file);
+  const json = jsonText(appraisalJson(appraise(study), startValues(study)));
+  const unconfirmed = startValueWords(study);
+  const notes = unconfirmed === '' ? [] : [`${unconfirmed}.`];
+  if (out === undefined) return { out: json, notes };
   mkdirSync(out, { recursive: true });
   writeFileSync(resolve(out, 'appraisal.json'), json);
-  return { out: '' };
+  return { out: '', notes };
 }

@@ -45,13 +45,21 @@ function whyDropped(
   return sentence(`dearer: ${cost}${also}`);
 }
 
+/** The drafted question on a start value that nobody has confirmed. */
+export const openStartValue = (name: string): string => `Start value not confirmed: ${name}.`;
+
 /**
  * What the appraisal says for taking an option forward, for dropping each other one in the order of the ranking, and what
  * is still to be confirmed of it. A draft: what decides besides rules and cost only people can write.
  * @param number of the option that is taken forward
+ * @param unconfirmed names of the start values of the study that nobody has confirmed
  * @throws RangeError where the appraisal has no option of that number
  */
-export function draftDecision(appraisal: Appraisal, number: number): Draft {
+export function draftDecision(
+  appraisal: Appraisal,
+  number: number,
+  unconfirmed: readonly string[] = [],
+): Draft {
   const taken = appraisal.options.find((option) => option.number === number);
   if (taken === undefined)
     throw new RangeError(`option: expected a number of the appraisal, received ${number}`);
@@ -61,7 +69,7 @@ export function draftDecision(appraisal: Appraisal, number: number): Draft {
     dropped: appraisal.options
       .filter((option) => option !== taken)
       .map((option) => ({ option: option.number, reason: whyDropped(appraisal, taken, option) })),
-    questions: said(taken, 'to confirm').map(sentence),
+    questions: [...said(taken, 'to confirm').map(sentence), ...unconfirmed.map(openStartValue)],
   };
 }
 

@@ -14,6 +14,11 @@ export interface Study {
   /** Shown wherever the study is shown, e.g. that a worked example is invented. */
   readonly notice: string;
   readonly brief: Brief;
+  /**
+   * Dotted paths of fields of the brief, e.g. 'brief.road.startLevelM', that hold a start value nobody has confirmed: a list
+   * or a group stands for all in it. Each once, in order; results do not hang on it.
+   */
+  readonly assumed: readonly string[];
   readonly books: Books;
   readonly options: OptionsSlice;
   readonly priorities: Priorities;

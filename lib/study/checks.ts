@@ -1,4 +1,5 @@
 import type { Brief, Crossing, Problem, Study } from '../model/index.ts';
+import { namesField } from './assumed.ts';
 import { problem } from './problem.ts';
 
 type Path = readonly (string | number)[];
@@ -192,6 +193,16 @@ function deckProblems({ deck }: Brief): Problem[] {
   ];
 }
 
+/** Every start value to be confirmed names a field of this brief. */
+function assumedProblems(study: Study): Problem[] {
+  return study.assumed.flatMap((path, i) => {
+    if (namesField(study, path)) return [];
+    const expected = "the path of a field of the brief, such as 'brief.road.startLevelM'";
+    const remedy = 'Correct the path or take it out of the list';
+    return [problem('refused', ['assumed', i], expected, `'${path}'`, { remedy })];
+  });
+}
+
 function bookProblems({ books }: Study): Problem[] {
   const path = ['books', 'rates'];
   return books.rates.flatMap((rate, i) => {
@@ -284,6 +295,7 @@ export function checkStudy(study: Study): Problem[] {
     ...obstacleProblems(brief),
     ...waterProblems(brief),
     ...groundProblems(brief),
+    ...assumedProblems(study),
     ...bookProblems(study),
     ...optionProblems(study),
     ...decisionProblems(study),

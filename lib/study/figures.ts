@@ -6,6 +6,7 @@ import {
   type Study,
   type Told,
 } from '../model/index.ts';
+import { isAssumed } from './assumed.ts';
 import { parseStudy } from './readStudy.ts';
 import { studyVersion } from './schema.ts';
 
@@ -49,17 +50,27 @@ function typedOrPreset(at: At): FigureKind {
   return held(at.study, at.path) === held(preset, at.path) ? 'preset' : 'typed';
 }
 
-const typed = (path: string, label: Told<string>, unit = '', kind: Told<FigureKind> = 'typed'): Descriptor =>
-  described({
+/** Whether it was taken at the start of the study and nobody has confirmed it. */
+const isStartValue = (at: At): boolean => isAssumed(at.study, at.path.replaceAll('/', '.'));
+
+function typed(path: string, label: Told<string>, unit = '', kind: Told<FigureKind> = 'typed'): Descriptor {
+  const kindAt = (at: At): FigureKind => {
+    if (isStartValue(at)) return 'preset';
+    return typeof kind === 'function' ? kind(at) : kind;
+  };
+  return described({
     path,
     label,
     unit,
-    kind,
-    method: (at) =>
-      (typeof kind === 'function' ? kind(at) : kind) === 'preset' ? 'preset, to be confirmed' : 'typed',
+    kind: kindAt,
+    method(at) {
+      if (isStartValue(at)) return 'preset: start value, not confirmed';
+      return kindAt(at) === 'preset' ? 'preset, to be confirmed' : 'typed';
+    },
     formula: 'as it stands in the study',
     sources: ['brief'],
   });
+}
 
 const obstacleOf = (at: At): string => at.study.brief.obstacles[at.index('i')]!.name;
 const waterOf = (at: At): string => at.study.brief.waters[at.index('i')]!.name;

@@ -12,6 +12,7 @@ import {
   tieIns,
   type FormId,
 } from '../model/index.ts';
+import { inOrder } from './assumed.ts';
 import { fillGround } from './fillGround.ts';
 import { asPriceDate, priceDateWords } from './priceDate.ts';
 
@@ -283,6 +284,7 @@ export const studySchema = z.strictObject({
   reference: text.default(''),
   notice: text.default(''),
   brief,
+  assumed: z.array(z.string().max(200)).max(100_000).default([]).transform(inOrder),
   books: books.prefault({}),
   options: options.prefault({}),
   priorities: priorities.prefault({}),

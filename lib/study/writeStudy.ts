@@ -2,6 +2,7 @@ import { sha256 } from '@noble/hashes/sha2.js';
 import { bytesToHex, utf8ToBytes } from '@noble/hashes/utils.js';
 import type { Study } from '../model/index.ts';
 import { askedOf } from './asked.ts';
+import { inOrder } from './assumed.ts';
 
 /** Canonical JSON of plain data: keys in code unit order, no white space, absent values left out. */
 function canonical(value: unknown): string {
@@ -18,12 +19,15 @@ function canonical(value: unknown): string {
 
 /** The study as canonical JSON: the same study always gives the same text, and reading it gives the same study. */
 export function writeStudy(study: Study): string {
-  return canonical(study);
+  // A study without start values is written as it was before a study could list them: its fingerprint stays.
+  const assumed = study.assumed.length === 0 ? undefined : inOrder(study.assumed);
+  return canonical({ ...study, assumed });
 }
 
 /**
  * SHA-256 of the canonical JSON in UTF-8, 64 hexadecimal figures, of what the study asks: its register remembers the
- * numbers that options have been given, its notes and its decision tell of the answer, and none of them changes it. So a
+ * numbers that options have been given, its notes and its decision tell of the answer, a start value that is confirmed is
+ * the same value, and none of them changes it. So a
  * study that is changed and changed back, and one that a note is written to, keeps its fingerprint.
  */
 export function fingerprint(study: Study): string {

@@ -67,3 +67,14 @@ describe('appraise', () => {
     30_000,
   );
 });
+
+it('appraise(study with start values) counts and names those that nobody has confirmed', () => {
+  const file = changedExample((study) => {
+    Object.assign(study['options']!, { forms: ['composite-i'], workOutAnyway: [] });
+    Object.assign(study, { assumed: ['brief.road.endLevelM', 'brief.road.startLevelM', 'brief.loading'] });
+  });
+  const printed = answer(appraiseCommand, file);
+  expect(printed.err).toBe('2 start values not confirmed: load standard, level of the road.');
+  const result = JSON.parse(printed.out) as { startValuesNotConfirmed: string[] };
+  expect(result.startValuesNotConfirmed).toEqual(['load standard', 'level of the road']);
+}, 60_000);

@@ -14,3 +14,15 @@ it('explain(study, options/1/cost) prints value, formula and inputs; a path with
   expect(wrong.code).toBe(2);
   expect(wrong.err).toMatch(/expected .*received/);
 });
+
+it('explain(study, path) says of a start value that nobody has confirmed it, and of others nothing', () => {
+  const file = changedExample((study) => {
+    Object.assign(study['options']!, { forms: ['composite-i'], workOutAnyway: [] });
+    Object.assign(study, { assumed: ['brief.deck.2.widthM'] });
+  });
+  const printed = answer(explainCommand, `${file} brief/deck/2/widthM brief/deck/3/widthM`);
+  expect(JSON.parse(printed.out)).toMatchObject([
+    { kind: 'preset', because: { method: 'preset: start value, not confirmed' } },
+    { kind: 'typed', because: { method: 'typed' } },
+  ]);
+});

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { changedOption, draftDecision, issuedOn, sinceIssued } from '../../lib/decide/index.ts';
+import { afterEdit, changedOption, draftDecision, issuedOn, sinceIssued } from '../../lib/decide/index.ts';
 import { sayMoney } from '../../lib/decide/words.ts';
-import { parseStudy, writeStudy, type Decision, type Study } from '../../lib/index.ts';
+import { confirmed, parseStudy, writeStudy, type Decision, type Study } from '../../lib/index.ts';
 import { answerTo } from '../appraise/answerTo.ts';
 import { workedStudy } from '../option-study/study.ts';
 
@@ -71,8 +71,64 @@ describe('draftDecision(appraisal, number)', () => {
     expect(draft.dropped.at(-1)!.reason).toBe('Out by rule: a pier stands in the navigation channel.');
   });
 
+  it('asks of every start value that nobody has confirmed, behind what the rules leave open', () => {
+    const rules = draftDecision(appraisal, leader.number).questions;
+    expect(draftDecision(appraisal, leader.number, ['load standard', 'ground line']).questions).toEqual([
+      ...rules,
+      'Start value not confirmed: load standard.',
+      'Start value not confirmed: ground line.',
+    ]);
+  });
+
   it('refuses an option that the appraisal does not have', () => {
     expect(() => draftDecision(appraisal, 999)).toThrow('received 999');
+  });
+});
+
+describe('afterEdit(before, edited)', () => {
+  const assumed = ['brief.loading', 'brief.road.endLevelM', 'brief.road.startLevelM'];
+  const open: Study = {
+    ...study,
+    assumed,
+    decision: {
+      ...draftDecision(appraisal, leader.number, ['load standard', 'level of the road']),
+      dissent: '',
+      author: '',
+      date: '',
+      issued: null,
+    },
+  };
+  const questions = ({ decision }: Study): readonly string[] => decision!.questions;
+  const level = 'Start value not confirmed: level of the road.';
+  const raised = (from: Study, key: 'startLevelM' | 'endLevelM'): Study => ({
+    ...from,
+    brief: { ...from.brief, road: { ...from.brief.road, [key]: from.brief.road[key] + 0.5 } },
+  });
+
+  it('takes a question out of the draft once none of its figures is a start value any more', () => {
+    const half = afterEdit(open, raised(open, 'startLevelM'));
+    expect(half.assumed).toEqual(['brief.loading', 'brief.road.endLevelM']);
+    expect(questions(half)).toEqual(questions(open));
+    const whole = afterEdit(half, raised(half, 'endLevelM'));
+    expect(whole.assumed).toEqual(['brief.loading']);
+    expect(questions(whole)).toEqual(questions(open).filter((words) => words !== level));
+    const agreed = afterEdit(open, confirmed(open, ['brief.road']));
+    expect(questions(agreed)).toEqual(questions(whole));
+  });
+
+  it('leaves a question that people have written over, and an issued decision, as they are', () => {
+    const own = questions(open).map((words) => (words === level ? 'Ask the county for levels.' : words));
+    const written: Study = { ...open, decision: { ...open.decision!, questions: own } };
+    expect(questions(afterEdit(written, confirmed(written, assumed)))).toContain(
+      'Ask the county for levels.',
+    );
+    const issued: Study = {
+      ...open,
+      decision: { ...open.decision!, issued: issuedOn('2026-03-05', appraisal) },
+    };
+    const later = afterEdit(issued, confirmed(issued, assumed));
+    expect(later.assumed).toEqual([]);
+    expect(later.decision).toEqual(issued.decision);
   });
 });
 

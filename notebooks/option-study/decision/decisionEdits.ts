@@ -2,6 +2,7 @@ import {
   changedOption,
   draftDecision,
   issuedOn,
+  startValues,
   type Appraisal,
   type Decision,
   type Study,
@@ -30,7 +31,7 @@ export const withDraft = (study: Study, appraisal: Appraisal, number: number, to
     date: today,
     issued: null,
     ...study.decision,
-    ...draftDecision(appraisal, number),
+    ...draftDecision(appraisal, number, startValues(study)),
   },
 });
 
@@ -43,8 +44,9 @@ const changed = (study: Study, change: (decision: Decision) => Decision): Study 
 /** The study with another option taken forward: what was drafted follows it, what people have written stays. */
 export const withTaken = (study: Study, appraisal: Appraisal, number: number): Study =>
   changed(study, (decision) => {
-    const before = has(appraisal, decision.option) ? draftDecision(appraisal, decision.option) : null;
-    return changedOption(decision, before, draftDecision(appraisal, number));
+    const draft = (option: number) => draftDecision(appraisal, option, startValues(study));
+    const before = has(appraisal, decision.option) ? draft(decision.option) : null;
+    return changedOption(decision, before, draft(number));
   });
 
 /** Numbers of options that the decision says nothing of, in the order of the ranking. */
