@@ -29,9 +29,9 @@ export function namesField(study: Pick<Study, 'brief'>, path: string): boolean {
   );
 }
 
-/** Whether what stands at a path of the study is a start value that nobody has confirmed. */
+/** Whether what stands at a path of the study, or something in it, is a start value that nobody has confirmed. */
 export const isAssumed = ({ assumed }: Study, path: string): boolean =>
-  assumed.some((marked) => covers(marked, path));
+  assumed.some((marked) => covers(marked, path) || covers(path, marked));
 
 /** For each entry of a list the place it had before; undefined for one that is new. A copy has the place of its original. */
 function origins(before: readonly unknown[], after: readonly unknown[]): (number | undefined)[] {
@@ -117,7 +117,7 @@ export const assumedAgain = (study: Study, earlier: Study, paths: readonly strin
   ...study,
   assumed: inOrder([
     ...study.assumed,
-    ...paths.filter((path) => isAssumed(earlier, path)),
+    ...paths.filter((path) => earlier.assumed.some((marked) => covers(marked, path))),
     ...earlier.assumed.filter((marked) => paths.some((path) => covers(path, marked))),
   ]),
 });

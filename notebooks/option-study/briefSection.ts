@@ -101,7 +101,7 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
           h(
             'p',
             {},
-            'Plain underline: typed here. Dotted: preset, to be confirmed. Dashed: unknown, and the result is wider for it.',
+            'Plain underline: typed here. Dotted: preset or start value, to be confirmed. Dashed: unknown, and the result is wider for it.',
           ),
           presetNotes(v.brief),
           h('p', onScreen, 'Drag a figure sideways, use the arrow keys, or type; ? for not known.'),

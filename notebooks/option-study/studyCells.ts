@@ -169,6 +169,7 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     { policy: 'latest' },
   );
   return {
+    head,
     brief,
     books,
     options,

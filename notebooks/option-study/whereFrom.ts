@@ -1,6 +1,13 @@
-import { figure, trialFigure, type AppraisedOption, type FigureContext } from '../../lib/index.ts';
+import {
+  figure,
+  trialFigure,
+  type Appraisal,
+  type AppraisedOption,
+  type FigureContext,
+  type Study,
+} from '../../lib/index.ts';
 import { ofTrial, trialIn } from '../drawing/asked.ts';
-import { whereFrom, type Ask, type WhereFrom } from '../page/index.ts';
+import { whereFrom, type Ask, type Head, type WhereFrom } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import type { StudyCells } from './studyCells.ts';
 
@@ -37,7 +44,7 @@ export const stationOf = (path: string): string | undefined =>
 /** Lets every figure of the page be asked where it comes from; a study and its appraisal always answer for one age. */
 export function studyWhereFrom(graph: Graph, cells: StudyCells, sheet: HTMLElement): WhereFrom {
   const where = whereFrom(sheet, stationOf);
-  let age: FigureContext | undefined;
+  let age: { readonly head: Head; readonly asked: Study; readonly appraisal: Appraisal } | undefined;
   let ask: Ask | null = null;
   /** The reference at other depths, worked out beside the appraisal. */
   let trials: readonly AppraisedOption[] = [];
@@ -52,10 +59,13 @@ export function studyWhereFrom(graph: Graph, cells: StudyCells, sheet: HTMLEleme
   const stopTrials = graph.watch(cells.byDepth, (state) => {
     if (state.state === 'ready') trials = state.value;
   });
-  const stop = graph.view({ study: cells.asked, appraisal: cells.appraisal }, (state) => {
+  const { head, asked, appraisal } = cells;
+  const stop = graph.view({ head, asked, appraisal }, (state) => {
     if ('value' in state && state.value !== age) {
-      const context = state.value;
-      age = context;
+      age = state.value;
+      // What is asked knows nothing of start values, for results do not hang on them.
+      const study = { ...age.asked, assumed: age.head.assumed };
+      const context: FigureContext = { study, appraisal: age.appraisal };
       ask = (path) => ofTrials(context, path);
     }
     where.set(ask, state.state === 'pending');

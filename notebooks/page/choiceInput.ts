@@ -1,5 +1,6 @@
 import { h } from '../html.ts';
 import type { Origin } from './figureSpec.ts';
+import { originWords } from './figureSpec.ts';
 import { nextId } from './nextId.ts';
 import type { Way } from './refusal.ts';
 import { markRefused, refusalSlot } from './refusal.ts';
@@ -19,6 +20,8 @@ export interface ChoiceSpec<T extends string> {
   /** Tells a field from others of its cell across drawings of it anew; the label unless given. */
   readonly key?: string;
   readonly change: (value: T) => void;
+  /** Offered below a start value: that it stands. */
+  readonly confirm?: () => void;
 }
 
 export interface ChoiceInput<T extends string> {
@@ -37,13 +40,40 @@ export function choiceInput<T extends string>(spec: ChoiceSpec<T>): ChoiceInput<
     { 'aria-label': spec.label },
     spec.choices.map((choice) => h('option', { value: choice.value }, choice.words)),
   );
-  const element = h('span', { class: 'entry', 'data-key': spec.key ?? spec.label }, field, refusal.element);
+  const below = h('span', { class: 'below' });
+  const element = h(
+    'span',
+    { class: 'entry', 'data-key': spec.key ?? spec.label },
+    field,
+    below,
+    refusal.element,
+  );
+  const confirm = h(
+    'button',
+    { type: 'button', class: 'action', 'aria-label': `confirm ${spec.label}` },
+    'confirm',
+  );
+  confirm.addEventListener('click', () => {
+    field.focus();
+    spec.confirm?.();
+  });
+  const offer = (): void => {
+    const isOffered = origin === 'assumed' && spec.confirm !== undefined && element.matches(':focus-within');
+    below.replaceChildren(...(isOffered ? [confirm] : []));
+  };
   const dress = (isRefused = false): void => {
     field.value = value;
     field.className = `fig ${value === 'unknown' ? 'unknown' : origin}${isRefused ? ' refused' : ''}`;
+    if (originWords[origin].length === 0) field.removeAttribute('aria-description');
+    else field.setAttribute('aria-description', originWords[origin].join('; '));
     markRefused(field, isRefused ? refusal : null);
     if (!isRefused) refusal.clear();
+    offer();
   };
+  element.addEventListener('focusin', offer);
+  element.addEventListener('focusout', ({ relatedTarget }) => {
+    if (!(relatedTarget instanceof Node && element.contains(relatedTarget))) below.replaceChildren();
+  });
   field.addEventListener('change', () => {
     const chosen = spec.choices.find((choice) => choice.value === field.value);
     if (chosen === undefined || chosen.value === value) return;

@@ -1,4 +1,4 @@
-import type { Problem, Study } from '../../lib/index.ts';
+import { assumedAgain, confirmed, isAssumed, type Problem, type Study } from '../../lib/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import type { ChoiceSpec } from './choiceInput.ts';
 import { choiceInput } from './choiceInput.ts';
@@ -15,7 +15,7 @@ import { wordsInput } from './wordsInput.ts';
 
 type Bound = 'value' | 'input' | 'change' | 'drop' | 'key' | 'origin';
 
-/** Where the origin of a field is read from; every field counts as typed unless it says otherwise. */
+/** Where the origin of a field is read from; every field but start values counts as typed unless it says otherwise. */
 export interface FieldOptions {
   /** Whether the field still holds a preset that is to be confirmed. */
   readonly isPreset?: (draft: unknown) => boolean;
@@ -31,6 +31,8 @@ export interface Made<T> {
   readonly has?: (study: Study) => boolean;
   /** Places whose problems are said beside it. */
   readonly owns?: readonly Path[];
+  /** Places that it is made from; those whose problems are said beside it unless given. */
+  readonly from?: (study: Study) => readonly Path[];
 }
 
 /** Where a field stands: an entry of the study, or a value made from several. */
@@ -62,15 +64,23 @@ export interface Fields {
 
 /** An entry of the study as a value that is read and written. */
 function entryAt<T>(place: FieldPlace<T>): Required<Made<T>> {
-  if ('get' in place) return { has: () => true, owns: [], ...place };
+  if ('get' in place) {
+    const { owns = [], from = () => owns } = place;
+    return { has: () => true, ...place, owns, from };
+  }
   return {
     key: place.join('.'),
     get: (study) => getAt(study, place) as T,
     put: (study, value) => putAt(study, place, value),
     has: (study) => hasAt(study, place),
     owns: [place],
+    from: () => [place],
   };
 }
+
+/** The places that an entry is made from as the study names them: 'brief.deck.0.widthM'. */
+const pathsOf = <T>({ from }: Required<Made<T>>, study: Study): string[] =>
+  from(study).map((path) => path.join('.'));
 
 const samePath = (one: Path, other: Path): boolean => one.length === other.length && isWithin(one, other);
 
@@ -109,12 +119,19 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
       if (shown.words(good) === shown.words(entry.get(draft))) {
         return [{ words: 'Undo the last change', take: store.undo }];
       }
-      const take = (): void => store.edit((study) => entry.put(study, good), { what: 'going back' });
+      const take = (): void => {
+        const valid = store.valid();
+        store.edit((study) => assumedAgain(entry.put(study, good), valid, pathsOf(entry, valid)), {
+          what: 'going back',
+        });
+      };
       return [{ words: `Back to ${shown.words(good)}`, take }];
     };
     follow((draft, problems) => {
       if (!entry.has(draft)) return;
-      shown.set(entry.get(draft), isPreset?.(draft) === true ? 'preset' : 'typed');
+      const isStart = pathsOf(entry, draft).some((path) => isAssumed(draft, path));
+      const origin = isStart ? 'assumed' : isPreset?.(draft) === true ? 'preset' : 'typed';
+      shown.set(entry.get(draft), origin);
       const mine = problems.filter(isMine);
       if (mine.length > 0) {
         shown.refuse(`${mine.map(say).join(' ')} The last valid study is kept.`, back(draft));
@@ -131,10 +148,16 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
     (value: T): void =>
       store.edit((study) => change(study, value), { coalesce: key, what });
 
+  const confirm =
+    <T>(entry: Required<Made<T>>, what: string) =>
+    (): void =>
+      store.edit((study) => confirmed(study, pathsOf(entry, study)), { what: `confirming ${what}` });
+
   return {
     figure(place, { isPreset, ...spec }) {
       const entry = entryAt(place);
       const figure = figureInput({
+        confirm: confirm(entry, spec.label),
         ...spec,
         value: start(entry),
         key: entry.key,
@@ -154,6 +177,7 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
       const entry = entryAt(place);
       const edit = put(entry, spec.label);
       const choice = choiceInput<T>({
+        confirm: confirm(entry, spec.label),
         ...spec,
         value: start(entry),
         key: entry.key,
@@ -170,6 +194,7 @@ export function fieldsOf(graph: Graph, store: StudyStore, say: (problem: Problem
       const entry = entryAt(place);
       const edit = put(entry, spec.label);
       const words = wordsInput({
+        confirm: confirm(entry, spec.label),
         ...spec,
         value: start(entry),
         key: entry.key,

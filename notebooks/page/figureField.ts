@@ -1,5 +1,6 @@
 import { h } from '../html.ts';
 import type { FigureSpec, Origin } from './figureSpec.ts';
+import { originWords } from './figureSpec.ts';
 import type { Figure } from './figureText.ts';
 import { writeFigure } from './figureText.ts';
 import { nextId } from './nextId.ts';
@@ -38,7 +39,6 @@ export function figureField(spec: FigureSpec): FigureField {
     inputmode: 'decimal',
     spellcheck: 'false',
     'aria-label': unit === undefined ? label : `${label}, ${unit}`,
-    'aria-description': description.join('; '),
     ...(spec.min && { 'aria-valuemin': spec.min.value }),
     ...(spec.max && { 'aria-valuemax': spec.max.value }),
   });
@@ -65,6 +65,7 @@ export function figureField(spec: FigureSpec): FigureField {
     dress(shown, origin, isRefused) {
       const isUnknown = shown === 'unknown' && !isSaid;
       field.className = `fig ${isUnknown ? 'unknown' : origin}${isRefused ? ' refused' : ''}`;
+      field.setAttribute('aria-description', [...originWords[origin], ...description].join('; '));
       if (shown === 'unknown') field.removeAttribute('aria-valuenow');
       else field.setAttribute('aria-valuenow', String(shown));
       const words = writeFigure(shown, spec);

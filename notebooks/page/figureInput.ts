@@ -107,19 +107,30 @@ export function figureInput(spec: FigureSpec): FigureInput {
   const hideScale = (): void => {
     below.replaceChildren();
     inHand(false);
-    if (unknown !== undefined && shown !== 'unknown' && hasFocus()) offerUnknown();
+    if (hasFocus()) offer();
   };
-  const offerUnknown = (): void => {
-    const choose = h('button', { type: 'button', class: 'action', tabindex: -1 }, unknown);
-    choose.addEventListener('pointerdown', (event) => {
-      event.preventDefault();
+  /** Offers below the figure what keys do too: that it is not known, that it stands. */
+  const offer = (): void => {
+    const way = (words: string, take: () => void): HTMLElement => {
+      const button = h('button', { type: 'button', class: 'action', tabindex: -1 }, words);
+      button.addEventListener('pointerdown', (event) => {
+        event.preventDefault();
+        take();
+      });
+      return button;
+    };
+    const choose = (): void => {
       stopTyping();
       unrefuse();
       move('unknown');
       write();
       keep();
-    });
-    below.replaceChildren(choose);
+    };
+    const { confirm } = spec;
+    below.replaceChildren(
+      ...(origin === 'assumed' && confirm !== undefined ? [way('confirm', confirm)] : []),
+      ...(unknown !== undefined && shown !== 'unknown' ? [way(unknown, choose)] : []),
+    );
   };
 
   const start = (): number => (shown === 'unknown' ? (spec.from ?? spec.min?.value ?? 0) : shown);
@@ -187,7 +198,7 @@ export function figureInput(spec: FigureSpec): FigureInput {
     if (key === 'Enter') {
       const untouched = !isTyping && shown === before;
       finish();
-      if (untouched && origin === 'preset') spec.confirm?.();
+      if (untouched && origin !== 'typed') spec.confirm?.();
       if (!isRefused) selectAll();
     } else if (key === 'Escape') {
       goBack();
@@ -254,10 +265,12 @@ export function figureInput(spec: FigureSpec): FigureInput {
       const next = toShown(value);
       if (isTyping || (next === shown && from === origin)) return;
       if (next !== shown) unrefuse();
+      const isOther = from !== origin;
       shown = next;
       origin = from;
       if (!isTold) [before, originBefore] = [shown, origin];
       write();
+      if (isOther && hasFocus()) offer();
     },
     refuse(words, ways = []) {
       if (words === null) unrefuse();

@@ -1,8 +1,15 @@
 import type { ScaleMark } from './figureScale.ts';
 import type { Figure, FigureRules } from './figureText.ts';
 
-/** Where a figure comes from: typed here, or preset and to be confirmed. */
-export type Origin = 'typed' | 'preset';
+/** Where a figure comes from: typed here, preset and to be confirmed, or taken at the start because nobody has said it. */
+export type Origin = 'typed' | 'preset' | 'assumed';
+
+/** What an origin is, for those who do not see the underline; nothing of what is typed. */
+export const originWords: Readonly<Record<Origin, readonly string[]>> = {
+  typed: [],
+  preset: ['preset, to be confirmed'],
+  assumed: ['start value, not confirmed'],
+};
 
 /** A figure in a sentence or table. Limits, places and steps are in the unit shown. */
 export interface FigureSpec extends FigureRules {
@@ -27,6 +34,6 @@ export interface FigureSpec extends FigureRules {
   readonly change?: (value: Figure) => void;
   /** Takes back whatever `input` has told in this go, where more hangs on a value than the value itself. */
   readonly drop?: () => void;
-  /** Enter on a preset that was left as it is. */
+  /** Enter on a preset or start value that was left as it is; a start value offers it in words too. */
   readonly confirm?: () => void;
 }

@@ -1,9 +1,9 @@
-import type { Problem, Study } from '../../lib/index.ts';
+import { afterEdit, type Problem, type Study } from '../../lib/index.ts';
 import type { Graph, Input } from '../reactive/index.ts';
 import { share } from './share.ts';
 
 /** What heads a study and is no slice of its own. */
-export type Head = Pick<Study, 'format' | 'version' | 'title' | 'reference' | 'notice'>;
+export type Head = Pick<Study, 'format' | 'version' | 'title' | 'reference' | 'notice' | 'assumed'>;
 
 /** The last valid study, slice by slice, as inputs of the graph; a slice that says the same stays the same value. */
 export interface Slices {
@@ -62,12 +62,13 @@ interface Step {
   readonly what: string;
 }
 
-const headOf = ({ format, version, title, reference, notice }: Study): Head => ({
+const headOf = ({ format, version, title, reference, notice, assumed }: Study): Head => ({
   format,
   version,
   title,
   reference,
   notice,
+  assumed,
 });
 
 /**
@@ -175,7 +176,17 @@ export function studyStore(
       const last = done.at(-1);
       const joins = isOpen && coalesce !== undefined && last?.key === coalesce;
       if (!joins) endStep();
-      const changed = share(draft, change(draft));
+      const edited = change(draft);
+      // What follows from edits by themselves is found anew from where the step began.
+      const begun = joins ? last.before : draft;
+      const changed = share(
+        draft,
+        afterEdit(begun, {
+          ...edited,
+          ...(edited.assumed === draft.assumed && { assumed: begun.assumed }),
+          ...(edited.decision === draft.decision && { decision: begun.decision }),
+        }),
+      );
       if (changed === draft) return;
       // A step that comes back to its start is that start itself, so that ending it can tell.
       const next = joins ? share(last.before, changed) : changed;

@@ -1,5 +1,6 @@
 import { h } from '../html.ts';
 import type { Origin } from './figureSpec.ts';
+import { originWords } from './figureSpec.ts';
 import { nextId } from './nextId.ts';
 import type { Way } from './refusal.ts';
 import { markRefused, refusalSlot } from './refusal.ts';
@@ -16,6 +17,8 @@ export interface WordsSpec {
   readonly most?: number;
   /** Once at the end of each go that changed them. Spaces round them are left out. */
   readonly change: (value: string) => void;
+  /** Enter on a start value that was left as it is. */
+  readonly confirm?: () => void;
 }
 
 export interface WordsInput {
@@ -37,12 +40,15 @@ export function wordsInput(spec: WordsSpec): WordsInput {
     tabindex: 0,
     contenteditable: 'plaintext-only',
     'aria-label': label,
-    'aria-description': 'Enter keeps, Escape goes back',
   });
   const element = h('span', { class: 'entry', 'data-key': spec.key ?? label }, field, refusal.element);
 
   const dress = (isRefused = false): void => {
     field.className = `fig words ${origin}${isRefused ? ' refused' : ''}`;
+    field.setAttribute(
+      'aria-description',
+      [...originWords[origin], 'Enter keeps, Escape goes back'].join('; '),
+    );
     markRefused(field, isRefused ? refusal : null);
     if (!isRefused) refusal.clear();
   };
@@ -79,7 +85,8 @@ export function wordsInput(spec: WordsSpec): WordsInput {
   field.addEventListener('input', () => setTyping(true));
   field.addEventListener('blur', keep);
   field.addEventListener('keydown', (event) => {
-    if (event.key === 'Enter') keep();
+    if (event.key === 'Enter' && !isTyping && origin === 'assumed') spec.confirm?.();
+    else if (event.key === 'Enter') keep();
     else if (event.key === 'Escape') write();
     else return;
     event.preventDefault();

@@ -16,9 +16,10 @@ const crossings: readonly Crossed[] = ['river', 'railway', 'road', 'open'];
 /** Whether something can stand in a gap: of the kind that stands there while it is empty, and of those on offer. */
 function fits(gap: keyof Gaps, value: unknown): boolean {
   if (gap === 'title') return typeof value === 'string';
+  if (value === 'unknown') return true;
   if (gap === 'crossed') return crossings.some((one) => one === value);
   if (gap === 'loading') return typeof value === 'string' && Object.hasOwn(standardNames, value);
-  return (gap !== 'lanes' && value === 'unknown') || (typeof value === 'number' && Number.isFinite(value));
+  return typeof value === 'number' && Number.isFinite(value);
 }
 
 /** The sentence in what a browser keeps at once. What it has no room for, or keeps from pages, is not kept. */

@@ -4,9 +4,16 @@ import { toDom } from '../drawing/toDom.ts';
 import { listed } from '../format.ts';
 import { h } from '../html.ts';
 import { loadingChoices } from '../option-study/brief/briefChoices.ts';
-import { choiceInput, figureInput, wordsInput, type Figure, type FigureSpec } from '../page/index.ts';
+import {
+  choiceInput,
+  figureInput,
+  wordsInput,
+  type Figure,
+  type FigureSpec,
+  type Origin,
+} from '../page/index.ts';
 import type { KeptGaps } from './keptGaps.ts';
-import { begun, type Crossed, type Gaps } from './newStudy.ts';
+import { begun, standingIn, type Crossed, type Gaps } from './newStudy.ts';
 import { smallCrossing } from './smallCrossing.ts';
 
 /** Gaps that hold a figure, 'unknown' among the answers. */
@@ -58,7 +65,7 @@ export function newSentence({ titles, begin, kept }: NewSentenceSpec): HTMLEleme
 
   const show = (): void => {
     const made = begun(gaps, titles());
-    for (const words of datumWords) words.textContent = datums[gaps.crossed];
+    for (const words of datumWords) words.textContent = datums[standingIn(gaps).crossed];
     start.toggleAttribute('disabled', !made.ok || begin === null);
     next.replaceChildren(
       h('b', {}, 'Next:'),
@@ -95,6 +102,58 @@ export function newSentence({ titles, begin, kept }: NewSentenceSpec): HTMLEleme
   const [pack] = ratePacks.values();
   const { currency, priceDate } = pack!;
 
+  const originOf = (gap: Gaps[keyof Gaps]): Origin => (gap === 'unknown' ? 'assumed' : 'typed');
+  /** What was said of the lanes when the present go at them began. */
+  let { lanes: lanesBefore } = gaps;
+  const lanesGap = figureInput({
+    label: 'lanes',
+    places: 0,
+    origin: originOf(gaps.lanes),
+    value: standingIn(gaps).lanes,
+    min: { value: 1 },
+    max: { value: 20 },
+    input: (lanes) => lanes !== 'unknown' && put({ lanes }),
+    change: () => (lanesBefore = gaps.lanes),
+    drop() {
+      put({ lanes: lanesBefore });
+      lanesGap.set(standingIn(gaps).lanes, originOf(lanesBefore));
+    },
+    confirm() {
+      const { lanes } = standingIn(gaps);
+      put({ lanes });
+      lanesGap.set(lanes, 'typed');
+    },
+  });
+  const crossedGap = choiceInput<Crossed>({
+    label: 'what is crossed',
+    value: standingIn(gaps).crossed,
+    origin: originOf(gaps.crossed),
+    choices: [
+      { value: 'river', words: 'a river' },
+      { value: 'railway', words: 'a railway' },
+      { value: 'road', words: 'a road' },
+      { value: 'open', words: 'open ground' },
+    ],
+    change: (crossed) => put({ crossed }),
+    confirm() {
+      const { crossed } = standingIn(gaps);
+      put({ crossed });
+      crossedGap.set(crossed, 'typed');
+    },
+  });
+  const loadingGap = choiceInput({
+    label: 'load standard',
+    value: standingIn(gaps).loading,
+    origin: originOf(gaps.loading),
+    choices: loadingChoices,
+    change: (loading) => put({ loading }),
+    confirm() {
+      const { loading } = standingIn(gaps);
+      put({ loading });
+      loadingGap.set(loading, 'typed');
+    },
+  });
+
   const element = h(
     'div',
     { class: 'new-study' },
@@ -108,39 +167,14 @@ export function newSentence({ titles, begin, kept }: NewSentenceSpec): HTMLEleme
         change: (title) => put({ title }),
       }).element,
       ' (its name): a road of ',
-      numbered(
-        1,
-        figureInput({
-          label: 'lanes',
-          places: 0,
-          origin: 'preset',
-          value: gaps.lanes,
-          min: { value: 1 },
-          max: { value: 20 },
-          input: (lanes) => lanes !== 'unknown' && put({ lanes }),
-        }).element,
-      ),
+      numbered(1, lanesGap.element),
       ' lanes on a deck ',
       numbered(
         2,
         figure('widthM', { ...metres('width of the deck', 3.5, 10), places: 2, max: { value: 80 } }),
       ),
       ' m wide has to cross ',
-      numbered(
-        3,
-        choiceInput<Crossed>({
-          label: 'what is crossed',
-          value: gaps.crossed,
-          origin: 'preset',
-          choices: [
-            { value: 'river', words: 'a river' },
-            { value: 'railway', words: 'a railway' },
-            { value: 'road', words: 'a road' },
-            { value: 'open', words: 'open ground' },
-          ],
-          change: (crossed) => put({ crossed }),
-        }).element,
-      ),
+      numbered(3, crossedGap.element),
       ' in ',
       numbered(4, figure('lengthM', { ...metres('length between the abutments', 5, 60) })),
       ' m between its abutments. No support may stand in ',
@@ -167,16 +201,7 @@ export function newSentence({ titles, begin, kept }: NewSentenceSpec): HTMLEleme
       ' m above ',
       datumWords[1],
       '. It is loaded by ',
-      numbered(
-        9,
-        choiceInput({
-          label: 'load standard',
-          value: gaps.loading,
-          origin: 'preset',
-          choices: loadingChoices,
-          change: (loading) => put({ loading }),
-        }).element,
-      ),
+      numbered(9, loadingGap.element),
       '; the budget is ',
       numbered(
         10,

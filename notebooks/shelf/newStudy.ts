@@ -5,6 +5,7 @@ import {
   studyVersion,
   type StandardId,
   type Study,
+  type Unknown,
 } from '../../lib/index.ts';
 import { fixed, listed } from '../format.ts';
 import { withClearanceState } from '../option-study/brief/clearanceState.ts';
@@ -18,10 +19,10 @@ export type Crossed = 'river' | 'railway' | 'road' | 'open';
 export interface Gaps {
   /** Empty: the study is named by its turn. */
   readonly title: string;
-  readonly lanes: number;
+  readonly lanes: Figure;
   /** Width of the deck between its outer edges, m. */
   readonly widthM: Figure;
-  readonly crossed: Crossed;
+  readonly crossed: Crossed | Unknown;
   /** Between the abutments, m. */
   readonly lengthM: Figure;
   /** Stretch in the middle in which no support may stand, m; 0 where one may stand anywhere. */
@@ -32,7 +33,7 @@ export interface Gaps {
   readonly roadLevelM: Figure;
   /** Height of the road above the water, rail, road or ground that is crossed, m. */
   readonly heightM: Figure;
-  readonly loading: StandardId;
+  readonly loading: StandardId | Unknown;
   /** Money of the rate pack. */
   readonly budget: Figure;
 }
@@ -40,17 +41,31 @@ export interface Gaps {
 /** A sentence in which nothing has been filled. */
 export const emptyGaps: Gaps = {
   title: '',
-  lanes: 2,
+  lanes: 'unknown',
   widthM: 'unknown',
-  crossed: 'river',
+  crossed: 'unknown',
   lengthM: 'unknown',
   barredM: 'unknown',
   headroomM: 'unknown',
   roadLevelM: 'unknown',
   heightM: 'unknown',
-  loading: 'lm1',
+  loading: 'unknown',
   budget: 'unknown',
 };
+
+/** What stands in the sentence until somebody says something else: start values like those that the notice says. */
+const usual: { readonly lanes: number; readonly crossed: Crossed; readonly loading: StandardId } = {
+  lanes: 2,
+  crossed: 'river',
+  loading: 'lm1',
+};
+
+/** What is said of them, or what stands there until then. */
+export const standingIn = ({ lanes, crossed, loading }: Gaps): typeof usual => ({
+  lanes: lanes === 'unknown' ? usual.lanes : lanes,
+  crossed: crossed === 'unknown' ? usual.crossed : crossed,
+  loading: loading === 'unknown' ? usual.loading : loading,
+});
 
 /** A study begun, or why it cannot be yet. */
 export type Begun =
@@ -151,13 +166,55 @@ function sketch({ lengthM, fromM, toM, roadM, datumM, isRiver }: Valley) {
   };
 }
 
+/** Paths of everything in a new study that nobody has said: what `taken` says, and what stood in the sentence untouched. */
+function assumedOf({ brief }: Study, gaps: Gaps): string[] {
+  const { deck, obstacles, waters } = brief;
+  const isOpen = gaps.crossed === 'open';
+  const isBarred = gaps.barredM !== 'unknown' && gaps.barredM > 0;
+  /** Whether a level follows from a road or a height that nobody has said. */
+  const isLevelTaken = gaps.roadLevelM === 'unknown' || gaps.heightM === 'unknown';
+  const under = (path: string, keys: readonly string[]): string[] => keys.map((key) => `${path}.${key}`);
+  return [
+    ...deck.map((_, i) => `brief.deck.${i}.widthM`),
+    ...deck.flatMap(({ kind }, i) =>
+      gaps.lanes === 'unknown' && kind === 'lane' ? [`brief.deck.${i}.kind`] : [],
+    ),
+    ...(gaps.loading === 'unknown' ? ['brief.loading'] : []),
+    'brief.crossing.ground',
+    ...(gaps.roadLevelM === 'unknown' ? under('brief.road', ['startLevelM', 'endLevelM']) : []),
+    ...(gaps.heightM === 'unknown' ? under('brief.road', ['fixedEnd', 'mayRiseM']) : []),
+    ...obstacles.flatMap(({ clearance }, i) => [
+      ...(gaps.crossed === 'unknown' ? [`brief.obstacles.${i}.kind`] : []),
+      ...(isBarred ? [] : under(`brief.obstacles.${i}`, ['fromM', 'toM'])),
+      ...(gaps.barredM === 'unknown' && !isOpen ? [`brief.obstacles.${i}.supports`] : []),
+      ...(clearance === null
+        ? []
+        : under(`brief.obstacles.${i}.clearance`, [
+            ...(isBarred ? [] : ['fromM', 'toM']),
+            ...(isLevelTaken ? ['datumLevelM'] : []),
+            ...(gaps.headroomM === 'unknown' ? ['headroomM'] : []),
+          ])),
+    ]),
+    ...waters.flatMap((_, i) =>
+      under(`brief.waters.${i}`, [
+        'fromM',
+        'toM',
+        'floodFromM',
+        'floodToM',
+        ...(isLevelTaken ? ['levelM'] : []),
+      ]),
+    ),
+  ].sort();
+}
+
 /**
  * A study of one's own from what is known of a crossing; what is not known stays unknown where the study allows it, and
- * otherwise takes a usual start value, which `taken` and the notice of the study say.
+ * otherwise takes a usual start value, which `taken` and the notice of the study say and its list of start values marks.
  * @param titles those of the studies that are there
  */
 export function begun(gaps: Gaps, titles: readonly string[] = []): Begun {
-  const { lengthM, crossed, lanes, barredM, headroomM, budget } = gaps;
+  const { lengthM, barredM, headroomM, budget } = gaps;
+  const { lanes, crossed, loading } = standingIn(gaps);
   if (lengthM === 'unknown') return { ok: false, why: 'the length between the abutments is not given' };
   const taken: string[] = [];
   const or = (given: Figure, start: number, words: (value: string) => string, places = 2): number => {
@@ -229,7 +286,7 @@ export function begun(gaps: Gaps, titles: readonly string[] = []): Begun {
         ...(gaps.heightM === 'unknown' && { fixedEnd: 'none', mayRiseM: MAY_RISE_M }),
       },
       deck,
-      loading: gaps.loading,
+      loading,
       obstacles: isStretch ? [obstacle] : [],
       waters: isRiver ? [{ name: names.river, ...water }] : [],
     },
@@ -241,7 +298,7 @@ export function begun(gaps: Gaps, titles: readonly string[] = []): Begun {
     taken.push(`${fixed(first.clearance.headroomM, 1)} m clear over ${first.name}`);
   }
   const notice = `Taken at the start, because nothing was said of it: ${listed(taken)}. Usual values, no source; correct them as the site becomes known.`;
-  return { ok: true, study: { ...study, notice }, taken };
+  return { ok: true, study: { ...study, notice, assumed: assumedOf(study, gaps) }, taken };
 }
 
 /** A railway or a road whose headroom nobody has said is given the preset that is to be confirmed. */

@@ -74,7 +74,7 @@ it('appraise(study with start values) counts and names those that nobody has con
     Object.assign(study, { assumed: ['brief.road.endLevelM', 'brief.road.startLevelM', 'brief.loading'] });
   });
   const printed = answer(appraiseCommand, file);
-  expect(printed.err).toBe('2 start values not confirmed: load standard, level of the road.');
+  expect(printed.err).toBe('2 start values not confirmed: level of the road, load standard.');
   const result = JSON.parse(printed.out) as { startValuesNotConfirmed: string[] };
-  expect(result.startValuesNotConfirmed).toEqual(['load standard', 'level of the road']);
+  expect(result.startValuesNotConfirmed).toEqual(['level of the road', 'load standard']);
 }, 60_000);

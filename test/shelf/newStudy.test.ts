@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { readStudy, survey, writeStudy, type Study } from '../../lib/index.ts';
+import { readStudy, startValues, survey, writeStudy, type Study } from '../../lib/index.ts';
 import { copyTitle } from '../../notebooks/shelf/kept.ts';
 import { begun, emptyGaps, type Crossed, type Gaps } from '../../notebooks/shelf/newStudy.ts';
 
@@ -59,6 +59,48 @@ describe('begun(gaps)', () => {
     const given = studyOf({ widthM: 12, barredM: 40, roadLevelM: 21, heightM: 9, headroomM: 5 });
     expect(given.notice).not.toMatch(/deck|wide|level|above/u);
     expect(given.notice).toContain('valley');
+  });
+
+  it('marks every start value that it takes, each at a field of the study, and what stood there untouched', () => {
+    const { assumed, brief } = studyOf({});
+    const lanes = brief.deck.flatMap(({ kind }, i) => (kind === 'lane' ? [`brief.deck.${i}.kind`] : []));
+    expect(lanes).toHaveLength(2);
+    expect(assumed).toEqual(
+      [
+        ...brief.deck.map((_, i) => `brief.deck.${i}.widthM`),
+        ...lanes,
+        'brief.loading',
+        'brief.crossing.ground',
+        ...['startLevelM', 'endLevelM', 'fixedEnd', 'mayRiseM'].map((key) => `brief.road.${key}`),
+        ...['kind', 'fromM', 'toM', 'supports'].map((key) => `brief.obstacles.0.${key}`),
+        ...['fromM', 'toM', 'floodFromM', 'floodToM', 'levelM'].map((key) => `brief.waters.0.${key}`),
+      ].toSorted(),
+    );
+  });
+
+  it('marks of what was given only how we have split it, and of a railway the headroom that is a preset', () => {
+    const given = studyOf({
+      lanes: 2,
+      crossed: 'river',
+      loading: 'lm1',
+      widthM: 12,
+      barredM: 40,
+      roadLevelM: 21,
+      heightM: 9,
+      headroomM: 5,
+    });
+    expect(startValues(given)).toEqual([
+      'widths of the strips of the deck',
+      'edges of the water of the river',
+      'ground line',
+    ]);
+    const railway = studyOf({ crossed: 'railway', barredM: 24, roadLevelM: 21, heightM: 9 });
+    expect(railway.assumed).toContain('brief.obstacles.0.clearance.headroomM');
+    expect(railway.assumed).not.toContain('brief.obstacles.0.clearance.datumLevelM');
+    expect(railway.assumed).not.toContain('brief.obstacles.0.kind');
+    // Without its height over the rails their level is none that somebody has said.
+    const height = studyOf({ crossed: 'railway', barredM: 24, roadLevelM: 21 });
+    expect(height.assumed).toContain('brief.obstacles.0.clearance.datumLevelM');
   });
 
   it('puts what is said where it belongs', () => {

@@ -138,7 +138,7 @@ describe('startValues(study)', () => {
     const river = study.brief.obstacles[0]!.name;
     expect(startValues(study)).toEqual([
       'widths of the strips of the deck',
-      `what ${river} is`,
+      `kind of ${river}`,
       'brief.road.maxGradient',
     ]);
     expect(startValueWords(study)).toMatch(/^3 start values not confirmed: widths/u);

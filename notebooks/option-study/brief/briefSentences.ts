@@ -1,8 +1,9 @@
-import { ratesFor, type Obstacle, type Study } from '../../../lib/index.ts';
+import { ratesFor, startValueWords, type Obstacle, type Study } from '../../../lib/index.ts';
 import { h } from '../../html.ts';
 import { standing, type StudyStore } from '../../page/index.ts';
 import type { Graph } from '../../reactive/index.ts';
 import { envelopeSentence, lineSentence, supportsSentence, windowsSentence } from './crossingSentences.ts';
+import { sayIn } from './fieldTable.ts';
 import { inWords } from './inWords.ts';
 import { budgetAmount, planShapeOf, provedOf } from './madeFields.ts';
 import { accessSentence, budgetSentence, demandsSentence, groundSentence } from './meansSentences.ts';
@@ -79,11 +80,19 @@ export function briefSentences(graph: Graph, store: StudyStore): HTMLElement {
           budgetSentence(words, study, amount),
         ],
       ];
-      return h(
-        'div',
-        { class: 'prose' },
-        paragraphs.map((sentences) => glued(h('p', {}, sentences))),
-      );
+      const unconfirmed = h('p', { class: 'small unconfirmed', role: 'status' });
+      fields.follow([], (draft) => {
+        const found = startValueWords(draft);
+        sayIn(unconfirmed, found === '' ? '' : `${found}.`);
+      });
+      return [
+        h(
+          'div',
+          { class: 'prose' },
+          paragraphs.map((sentences) => glued(h('p', {}, sentences))),
+        ),
+        unconfirmed,
+      ];
     },
   }).element;
 }

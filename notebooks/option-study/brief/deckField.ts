@@ -7,7 +7,7 @@ import { toDom } from '../../drawing/toDom.ts';
 import { h } from '../../html.ts';
 import { standing, type Path, type StudyStore } from '../../page/index.ts';
 import type { Graph } from '../../reactive/index.ts';
-import { sayIn } from './fieldTable.ts';
+import { confirmAction, sayIn } from './fieldTable.ts';
 import { problemBeside } from './problemBeside.ts';
 import { DECK_MARGIN_PX, drawnWidths, stripChainFields } from './stripChainFields.ts';
 import { hasUltimate } from './stripEdits.ts';
@@ -87,6 +87,16 @@ export function deckField(graph: Graph, store: StudyStore): HTMLElement {
         'div',
         { class: 'deck-field' },
         h('div', { class: 'deck-drawing' }, drawn, present.element, more, scaled),
+        h(
+          'p',
+          { class: 'list-actions' },
+          confirmAction(fields, store, {
+            words: 'Confirm the strips',
+            what: 'the strips of the deck',
+            key: 'confirm.deck',
+            paths: [list.join('.')],
+          }),
+        ),
         told,
         present.told,
         ultimate.told,

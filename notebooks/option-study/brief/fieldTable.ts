@@ -1,4 +1,6 @@
+import { confirmed, isAssumed } from '../../../lib/index.ts';
 import { h, type HtmlChild } from '../../html.ts';
+import type { Fields, StudyStore } from '../../page/index.ts';
 
 /**
  * Puts what fields say against their value below the row or drawing they stand in, each with the name of its field:
@@ -44,6 +46,31 @@ export function listAction(words: string, name: string, key: string, act: () => 
     others.at(-1)?.focus();
   });
   return button;
+}
+
+/** What can be confirmed in one go. */
+interface ConfirmSpec {
+  readonly words: string;
+  /** What is confirmed: 'ground line'. */
+  readonly what: string;
+  readonly key: string;
+  /** Where it stands, as the study names it: 'brief.crossing.ground'. */
+  readonly paths: readonly string[];
+}
+
+/** A word that confirms several start values as they stand; not there while none of them is one. */
+export function confirmAction(
+  fields: Fields,
+  store: StudyStore,
+  { words, what, key, paths }: ConfirmSpec,
+): HTMLElement {
+  const action = listAction(words, `confirm ${what} as it stands`, key, () =>
+    store.edit((study) => confirmed(study, paths), { what: `confirming ${what}` }),
+  );
+  fields.follow([], (draft) =>
+    action.toggleAttribute('hidden', !paths.some((path) => isAssumed(draft, path))),
+  );
+  return action;
 }
 
 /** Gives the focus to the field of that key inside a part, where it stands. */

@@ -1,10 +1,10 @@
 import type { ProfilePoint } from '../../../lib/index.ts';
 import { fixed } from '../../format.ts';
 import { h, type HtmlChild } from '../../html.ts';
-import { putAt, standing, type Fields, type Path, type StudyStore } from '../../page/index.ts';
+import { standing, type Fields, type Path, type StudyStore } from '../../page/index.ts';
 import type { Graph } from '../../reactive/index.ts';
-import { listAction, saidBelow, sayIn } from './fieldTable.ts';
-import { withEntry, withoutEntry } from './listEdits.ts';
+import { confirmAction, listAction, saidBelow, sayIn } from './fieldTable.ts';
+import { withEntry, withListOf, withoutEntry, withPasted } from './listEdits.ts';
 import { pastedProfile } from './pastedProfile.ts';
 import { problemBeside } from './problemBeside.ts';
 
@@ -49,6 +49,12 @@ function pointItem(
     h(
       'span',
       { class: 'acts' },
+      confirmAction(fields, store, {
+        words: 'confirm',
+        what: named,
+        key: `confirm.ground.${index}`,
+        paths: [[...list, index].join('.')],
+      }),
       listAction('add', `add a point after ${chainage}`, `add.ground.${index}`, () => {
         store.edit(
           (study) => withEntry(study, list, index + 1, pointAfter(study.brief.crossing.ground, index)),
@@ -67,16 +73,17 @@ function pointItem(
 function pasting(store: StudyStore) {
   const said = h('p', { class: 'pasted', role: 'status' });
   const take = (text: string): void => {
-    const { ground } = store.valid().brief.crossing;
+    const before = store.valid();
+    const { ground } = before.brief.crossing;
     const read = pastedProfile(text);
     said.classList.toggle('refusal', !read.ok);
     if (!read.ok) {
       said.replaceChildren(`Nothing taken: ${read.why}. The ${ground.length} points stay as they are.`);
       return;
     }
-    store.edit((study) => putAt(study, list, read.points), { what: 'pasting the ground line' });
+    store.edit((study) => withPasted(study, list, read.points), { what: 'pasting the ground line' });
     const takeBack = (): void => {
-      store.edit((study) => putAt(study, list, ground), { what: 'taking back the pasted ground line' });
+      store.edit((study) => withListOf(study, list, before), { what: 'taking back the pasted ground line' });
       said.replaceChildren();
     };
     said.replaceChildren(
@@ -111,6 +118,13 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
     shape: ({ brief }) => brief.crossing.ground.length,
     build({ brief }, fields): HtmlChild {
       const { ground } = brief.crossing;
+      const confirmLine = (): HTMLElement =>
+        confirmAction(fields, store, {
+          words: 'Confirm the ground line',
+          what: 'the ground line',
+          key: 'confirm.ground',
+          paths: [list.join('.')],
+        });
       if (ground.length > MOST_SHOWN) {
         const said = h('p', { class: 'refusal', role: 'status' });
         const ends = [0, ground.length - 1].map((index): Path => [...list, index, 'chainageM']);
@@ -123,6 +137,7 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
             `${ground.length} points from ${fixed(fromM, 1)} to ${fixed(toM, 1)}: too many to set out. Change them where they come from and paste them again.`,
           ),
           said,
+          h('p', { class: 'list-actions' }, confirmLine()),
         ];
       }
       const set = h(
@@ -130,7 +145,7 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
         { class: 'points', 'aria-label': 'Ground line: chainage above, level below' },
         ground.map((_, index) => pointItem(fields, store, ground, index)),
       );
-      return [set, saidBelow(set)];
+      return [set, saidBelow(set), h('p', { class: 'list-actions' }, confirmLine())];
     },
   }).element;
   const element = h(

@@ -1,4 +1,4 @@
-import type { Study } from '../../../lib/index.ts';
+import { assumedAgain, confirmed, type Study } from '../../../lib/index.ts';
 import { getAt, putAt, type Path } from '../../page/place.ts';
 
 /** The study with an entry put into the list at `path` so that it stands at `index`. */
@@ -16,3 +16,11 @@ export function withoutEntry(study: Study, path: Path, index: number): Study {
     list.filter((_, i) => i !== index),
   );
 }
+
+/** The study with another list at `path`, none of whose entries is a start value. */
+export const withPasted = (study: Study, path: Path, entries: readonly unknown[]): Study =>
+  putAt(confirmed(study, [path.join('.')]), path, entries);
+
+/** The study with the list at `path` as it was in an earlier state of it, start values among its entries. */
+export const withListOf = (study: Study, path: Path, earlier: Study): Study =>
+  assumedAgain(putAt(study, path, getAt(earlier, path)), earlier, [path.join('.')]);

@@ -1,5 +1,5 @@
 import { asPriceDate, type Budget, type Crossing, type Study } from '../../../lib/index.ts';
-import type { Figure, Made } from '../../page/index.ts';
+import type { Figure, Made, Path } from '../../page/index.ts';
 import { putAt } from '../../page/place.ts';
 import { priceDateWords } from '../words.ts';
 
@@ -22,6 +22,7 @@ export const planShape: Made<PlanShape> = {
     planShapeOf(study.brief.crossing) === shape
       ? study
       : putAt(study, planRadius, shape === 'curve' ? FIRST_RADIUS_M : shape),
+  from: () => [planRadius],
 };
 
 /** The radius of a curve, m. */
@@ -51,6 +52,8 @@ export const laneCount: Made<Figure> = {
     const kept = deck.flatMap((strip, i) => (gone.has(i) ? [] : i === last ? [strip, ...more] : [strip]));
     return putAt(study, ['brief', 'deck'], kept);
   },
+  from: ({ brief }) =>
+    brief.deck.flatMap((strip, i) => (isLane(strip) ? [['brief', 'deck', i, 'kind']] : [])),
 };
 
 /** Width of the stretch of an obstacle, m; changed about its middle. */
@@ -60,6 +63,7 @@ export const obstacleWidth = (index: number): Made<Figure> => ({
   get: ({ brief }) => widthOf(brief.obstacles[index]!),
   put: (study, widthM) =>
     putAt(study, ['brief', 'obstacles', index], widened(study.brief.obstacles[index]!, widthM)),
+  from: () => endsOf(['brief', 'obstacles', index]),
 });
 
 /** Width of the envelope over an obstacle, m; changed about its middle. */
@@ -73,12 +77,14 @@ export const envelopeWidth = (index: number): Made<Figure> => ({
       ['brief', 'obstacles', index, 'clearance'],
       widened(study.brief.obstacles[index]!.clearance!, widthM),
     ),
+  from: () => endsOf(['brief', 'obstacles', index, 'clearance']),
 });
 
 interface Stretch {
   readonly fromM: number;
   readonly toM: number;
 }
+const endsOf = (stretch: Path): Path[] => ['fromM', 'toM'].map((key) => [...stretch, key]);
 const toMillimetre = (metres: number): number => Number(metres.toFixed(3));
 const widthOf = ({ fromM, toM }: Stretch): number => toMillimetre(toM - fromM);
 
@@ -140,4 +146,5 @@ export const groundProved: Made<Proved> = {
           ['brief', 'groundStretches'],
           study.brief.groundStretches.map((stretch) => ({ ...stretch, known: proved === 'known' })),
         ),
+  from: ({ brief }) => brief.groundStretches.map((_, i) => ['brief', 'groundStretches', i, 'known']),
 };

@@ -5,7 +5,7 @@ import type { Graph } from '../../reactive/index.ts';
 import { obstacleKindChoices, supportChoices } from './briefChoices.ts';
 import { clearanceState, withClearanceState, type ClearanceState } from './clearanceState.ts';
 import { fieldRow, focusField, listAction } from './fieldTable.ts';
-import { withEntry, withoutEntry } from './listEdits.ts';
+import { withEntry, withListOf, withoutEntry, withPasted } from './listEdits.ts';
 import { pastedObstacles } from './pastedObstacles.ts';
 import { problemBeside } from './problemBeside.ts';
 
@@ -130,20 +130,21 @@ function pasting(store: StudyStore): { readonly box: HTMLElement; readonly take:
     spellcheck: 'false',
   });
   const take = (text: string): void => {
-    const before = store.valid().brief.obstacles;
+    const before = store.valid();
+    const had = before.brief.obstacles.length;
     const read = pastedObstacles(text);
     said.classList.toggle('refusal', !read.ok);
     if (!read.ok) {
-      said.replaceChildren(`Nothing taken: ${read.why}. The ${before.length} obstacles stay as they are.`);
+      said.replaceChildren(`Nothing taken: ${read.why}. The ${had} obstacles stay as they are.`);
       return;
     }
-    store.edit((study) => putAt(study, list, read.obstacles), { what: 'pasting obstacles' });
+    store.edit((study) => withPasted(study, list, read.obstacles), { what: 'pasting obstacles' });
     const takeBack = (): void => {
-      store.edit((study) => putAt(study, list, before), { what: 'taking back pasted obstacles' });
+      store.edit((study) => withListOf(study, list, before), { what: 'taking back pasted obstacles' });
       said.replaceChildren();
     };
     const words = [
-      `${read.obstacles.length} ${read.obstacles.length === 1 ? 'obstacle' : 'obstacles'} taken in place of ${before.length}`,
+      `${read.obstacles.length} ${read.obstacles.length === 1 ? 'obstacle' : 'obstacles'} taken in place of ${had}`,
       ...read.remarks,
     ];
     said.replaceChildren(

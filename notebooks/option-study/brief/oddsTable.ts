@@ -55,6 +55,7 @@ const isProved = (stretch: number): Made<'known' | 'unknown'> => ({
   has: ({ brief }) => stretch < brief.groundStretches.length,
   get: ({ brief }) => (brief.groundStretches[stretch]!.known ? 'known' : 'unknown'),
   put: (study, value) => putAt(study, [...list, stretch, 'known'], value === 'known'),
+  from: () => [[...list, stretch, 'known']],
 });
 
 function heading(fields: Fields, index: number): HTMLElement {

@@ -8,7 +8,7 @@ import { fixed } from '../../format.ts';
 import { h } from '../../html.ts';
 import type { Fields, Figure, Made, Path, StudyStore } from '../../page/index.ts';
 import { putAt } from '../../page/index.ts';
-import { listAction, saidBelow, sayIn } from './fieldTable.ts';
+import { confirmAction, listAction, saidBelow, sayIn } from './fieldTable.ts';
 import { withEntry, withoutEntry } from './listEdits.ts';
 import { stripForGap, withStripWidth } from './stripEdits.ts';
 import { stripLayout } from './stripLayout.ts';
@@ -53,6 +53,14 @@ const stripWidth = (index: number, layout: DeckLayout): Made<Figure> => {
     put: (study, width) =>
       layout === 'present' ? withStripWidth(study, index, width) : putAt(study, [...list, index, key], width),
     owns: [[...list, index, key]],
+    // An ultimate width that is that of the deck as first built is no other figure.
+    from: ({ brief: { deck } }) =>
+      deck[index]!.ultimateWidthM === deck[index]!.widthM
+        ? [
+            [...list, index, 'widthM'],
+            [...list, index, 'ultimateWidthM'],
+          ]
+        : [[...list, index, key]],
   };
 };
 
@@ -95,7 +103,17 @@ function stripWords(
     { class: 'strip' },
     width,
     h('span', { class: 'name' }, kind),
-    count > 1 && h('span', { class: 'acts' }, takeOut),
+    h(
+      'span',
+      { class: 'acts' },
+      confirmAction(fields, store, {
+        words: 'confirm',
+        what: `strip ${index + 1}`,
+        key: `confirm.deck.${index}`,
+        paths: [[...list, index].join('.')],
+      }),
+      count > 1 && takeOut,
+    ),
   );
 }
 
