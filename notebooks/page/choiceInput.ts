@@ -59,7 +59,8 @@ export function choiceInput<T extends string>(spec: ChoiceSpec<T>): ChoiceInput<
   });
   const offer = (): void => {
     const isOffered = origin === 'assumed' && spec.confirm !== undefined && element.matches(':focus-within');
-    below.replaceChildren(...(isOffered ? [confirm] : []));
+    // Put there again it would lose the focus.
+    if (isOffered !== confirm.isConnected) below.replaceChildren(...(isOffered ? [confirm] : []));
   };
   const dress = (isRefused = false): void => {
     field.value = value;

@@ -65,7 +65,9 @@ export function figureField(spec: FigureSpec): FigureField {
     dress(shown, origin, isRefused) {
       const isUnknown = shown === 'unknown' && !isSaid;
       field.className = `fig ${isUnknown ? 'unknown' : origin}${isRefused ? ' refused' : ''}`;
-      field.setAttribute('aria-description', [...originWords[origin], ...description].join('; '));
+      const stands =
+        origin !== 'typed' && spec.confirm !== undefined ? ['left as it is, Enter confirms it'] : [];
+      field.setAttribute('aria-description', [...originWords[origin], ...stands, ...description].join('; '));
       if (shown === 'unknown') field.removeAttribute('aria-valuenow');
       else field.setAttribute('aria-valuenow', String(shown));
       const words = writeFigure(shown, spec);

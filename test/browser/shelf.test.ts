@@ -86,6 +86,65 @@ describe('shelf', () => {
     silent(heard);
   });
 
+  it('marks the start values of a study begun from its length until they are changed or confirmed', async () => {
+    const { page, heard } = await site.open('index.html');
+    await page.getByRole('spinbutton', { name: 'length between the abutments' }).fill('48');
+    await page.keyboard.press('Enter');
+    await page.getByRole('button', { name: 'Work it out' }).click();
+    await page.waitForURL(/option-study\.html\?study=/u);
+    const field = (name: string) => page.locator(`[id="1+010"] [aria-label="${name}"]`);
+    const [level, standard] = [field('road level at the start, m'), field('load standard')];
+    /** Underline and words of a field. */
+    const mark = async (one: typeof level): Promise<string> => {
+      const line = await one.evaluate((element) => getComputedStyle(element).borderBottomStyle);
+      const words = (await one.getAttribute('aria-description')) ?? '';
+      return `${line}${words.includes('start value, not confirmed') ? ', not confirmed' : ''}`;
+    };
+    const unconfirmed = page.locator('[id="1+010"] .unconfirmed');
+    const counts = (count: number): Promise<void> =>
+      expect.poll(() => unconfirmed.textContent()).toMatch(new RegExp(`^${count} start values not`, 'u'));
+    await counts(11);
+    expect(await mark(level)).toBe('dotted, not confirmed');
+    expect(await mark(standard)).toBe('dotted, not confirmed');
+    expect(await mark(field('end, m'))).toBe('solid');
+    expect(await mark(page.locator('[aria-label="ground point 2, level, m"]'))).toBe('dotted, not confirmed');
+
+    // Changed at one end only, the level of the road has a start value still.
+    await level.focus();
+    await page.keyboard.press('Control+a');
+    await page.keyboard.type('101.5');
+    await page.keyboard.press('Enter');
+    expect(await mark(level)).toBe('solid');
+    await counts(11);
+    // Left as it is, Enter confirms it; a choice has a word for it below.
+    await field('road level at the end, m').focus();
+    await page.keyboard.press('Enter');
+    expect(await mark(field('road level at the end, m'))).toBe('solid');
+    await counts(10);
+    await standard.focus();
+    await page.getByRole('button', { name: 'confirm load standard' }).click();
+    expect(await mark(standard)).toBe('solid');
+    await counts(9);
+    await page.getByRole('button', { name: 'confirm the ground line as it stands' }).click();
+    await counts(8);
+    const undo = page.getByRole('button', { name: 'Undo', exact: true });
+    await undo.click();
+    await undo.click();
+    await counts(10);
+    expect(await mark(standard)).toBe('dotted, not confirmed');
+
+    await page.locator('.state', { hasText: 'saved' }).waitFor();
+    await page.reload();
+    await counts(10);
+    expect(await mark(level)).toBe('solid');
+    expect(await level.textContent()).toBe('101.50');
+    expect(await mark(standard)).toBe('dotted, not confirmed');
+    await page.emulateMedia({ media: 'print' });
+    expect(await mark(standard)).toBe('dotted, not confirmed');
+    expect(await unconfirmed.isVisible()).toBe(true);
+    silent(heard);
+  });
+
   it('leads to a study that is worked out', async () => {
     const { page, heard } = await site.open('index.html');
     await page.getByRole('link', { name: 'open a worked example' }).click();

@@ -1,6 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import { clearanceState, withClearanceState } from '../../notebooks/option-study/brief/clearanceState.ts';
-import { withEntry, withoutEntry } from '../../notebooks/option-study/brief/listEdits.ts';
+import {
+  withEntry,
+  withListOf,
+  withoutEntry,
+  withPasted,
+} from '../../notebooks/option-study/brief/listEdits.ts';
 import {
   budgetAmount,
   envelopeWidth,
@@ -12,6 +17,7 @@ import {
   radiusOfCurve,
 } from '../../notebooks/option-study/brief/madeFields.ts';
 import { hasUltimate, stripForGap, withStripWidth } from '../../notebooks/option-study/brief/stripEdits.ts';
+import { afterEdit, type Study } from '../../lib/index.ts';
 import { placesOf, workedStudy } from './study.ts';
 
 const study = workedStudy();
@@ -59,6 +65,50 @@ describe('made fields', () => {
     const proved = groundProved.put(study, 'known');
     expect(groundProved.get(proved)).toBe('known');
     expect(groundProved.put(proved, 'part')).toBe(proved);
+  });
+});
+
+describe('start values', () => {
+  const lanes = ['brief.deck.2.kind', 'brief.deck.3.kind'];
+  const widths = ['brief.deck.2.widthM', 'brief.deck.3.widthM', 'brief.deck.5.widthM'];
+  const begun: Study = { ...study, assumed: [...lanes, ...widths].toSorted() };
+  const marksAfter = (change: (from: Study) => Study): readonly string[] =>
+    afterEdit(begun, change(begun)).assumed;
+
+  it('another number of lanes is said by whoever changes it; a new lane is as wide as nobody has said', () => {
+    expect(laneCount.from?.(begun).map((path) => path.join('.'))).toEqual(lanes);
+    expect(marksAfter((from) => laneCount.put(from, 3))).toEqual([
+      'brief.deck.2.widthM',
+      'brief.deck.3.widthM',
+      'brief.deck.4.widthM',
+      'brief.deck.6.widthM',
+    ]);
+    expect(marksAfter((from) => laneCount.put(from, 2))).toEqual(begun.assumed);
+  });
+
+  it('a width that is changed is none, and the others go with their strips', () => {
+    expect(marksAfter((from) => withStripWidth(from, 2, 3.65))).toEqual(
+      [...lanes, 'brief.deck.3.widthM', 'brief.deck.5.widthM'].toSorted(),
+    );
+    const list = ['brief', 'deck'];
+    expect(marksAfter((from) => withoutEntry(from, list, 0))).toEqual([
+      'brief.deck.1.kind',
+      'brief.deck.1.widthM',
+      'brief.deck.2.kind',
+      'brief.deck.2.widthM',
+      'brief.deck.4.widthM',
+    ]);
+  });
+
+  it('a pasted list holds none, even where it says the same, and taken back it has its own again', () => {
+    const list = ['brief', 'crossing', 'ground'];
+    const sketched: Study = { ...study, assumed: ['brief.crossing.ground', 'brief.loading'] };
+    const { ground } = sketched.brief.crossing;
+    const raised = ground.map((point) => ({ ...point, levelM: point.levelM + 1 }));
+    const pasted = afterEdit(sketched, withPasted(sketched, list, raised));
+    expect(pasted.assumed).toEqual(['brief.loading']);
+    const back = afterEdit(pasted, withListOf(pasted, list, sketched));
+    expect(back).toEqual(sketched);
   });
 });
 

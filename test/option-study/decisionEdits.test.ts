@@ -96,3 +96,12 @@ it('withIssue and withoutIssue: frozen on the day with what was asked, and a dra
   expect(placesOf(issued)).toEqual([]);
   expect(withoutIssue(issued)).toEqual(drafted);
 });
+
+it('withDraft and withTaken: ask of the start values of the study, each once, whichever option is taken', () => {
+  const begun: Study = { ...study, assumed: ['brief.road.endLevelM', 'brief.road.startLevelM'] };
+  const asked = (one: Study): readonly string[] =>
+    one.decision!.questions.filter((words) => words.startsWith('Start value not confirmed'));
+  const draft = withDraft(begun, appraisal, first, DAY);
+  expect(asked(draft)).toEqual(['Start value not confirmed: level of the road.']);
+  expect(asked(withTaken(draft, appraisal, second))).toEqual(asked(draft));
+});

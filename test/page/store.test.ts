@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import example from '../../data/examples/low-ferry.json' with { type: 'json' };
-import { parseStudy } from '../../lib/index.ts';
+import { confirmed, parseStudy } from '../../lib/index.ts';
 import type { Study } from '../../lib/index.ts';
 import { studyStore } from '../../notebooks/page/store.ts';
 import { putAt } from '../../notebooks/page/place.ts';
@@ -127,6 +127,40 @@ describe('studyStore', () => {
     expect(value(store.slices.brief)).toBe(brief);
     store.undo();
     expect(value(store.slices.brief).crossing.endM).toBe(1470);
+  });
+
+  it('edit(change) of a start value takes its mark off, and undo brings both back', () => {
+    const { store, value } = opened();
+    const assumed = ['brief.crossing.endM', 'brief.loading'];
+    store.open({ ...lowFerry(), assumed });
+    const endTo = (endM: number): void =>
+      store.edit((study) => putAt(study, ['brief', 'crossing', 'endM'], endM), { coalesce: 'end' });
+    endTo(1475);
+    endTo(1480);
+    expect(value(store.slices.head).assumed).toEqual(['brief.loading']);
+    // Dragged back to where it began nobody has said anything.
+    endTo(1470);
+    expect(value(store.draft).assumed).toEqual(assumed);
+    store.endStep();
+    expect(value(store.history).undo).toBeNull();
+    endTo(1475);
+    store.endStep();
+    store.edit((study) => confirmed(study, ['brief.loading']), { what: 'confirming load standard' });
+    expect(value(store.draft).assumed).toEqual([]);
+    expect(value(store.history).undo).toBe('confirming load standard');
+    store.undo();
+    expect(value(store.draft).assumed).toEqual(['brief.loading']);
+    store.undo();
+    expect(value(store.draft).assumed).toEqual(assumed);
+    expect(value(store.slices.brief).crossing.endM).toBe(1470);
+  });
+
+  it('edit(change) that opens another study takes its start values with it', () => {
+    const { store, value } = opened();
+    store.open({ ...lowFerry(), assumed: ['brief.loading'] });
+    const other = { ...lowFerry(), title: 'Another', assumed: ['brief.surfacingM'] };
+    store.edit(() => other);
+    expect(value(store.draft).assumed).toEqual(['brief.surfacingM']);
   });
 
   it('endStep() forgets a drag that came back to where it began', () => {

@@ -87,16 +87,12 @@ export function deckField(graph: Graph, store: StudyStore): HTMLElement {
         'div',
         { class: 'deck-field' },
         h('div', { class: 'deck-drawing' }, drawn, present.element, more, scaled),
-        h(
-          'p',
-          { class: 'list-actions' },
-          confirmAction(fields, store, {
-            words: 'Confirm the strips',
-            what: 'the strips of the deck',
-            key: 'confirm.deck',
-            paths: [list.join('.')],
-          }),
-        ),
+        confirmAction(fields, store, {
+          words: 'Confirm the strips',
+          what: 'the deck',
+          key: 'confirm.deck',
+          paths: [list.join('.')],
+        }),
         told,
         present.told,
         ultimate.told,

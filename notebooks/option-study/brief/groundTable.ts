@@ -137,7 +137,7 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
             `${ground.length} points from ${fixed(fromM, 1)} to ${fixed(toM, 1)}: too many to set out. Change them where they come from and paste them again.`,
           ),
           said,
-          h('p', { class: 'list-actions' }, confirmLine()),
+          confirmLine(),
         ];
       }
       const set = h(
@@ -145,7 +145,7 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
         { class: 'points', 'aria-label': 'Ground line: chainage above, level below' },
         ground.map((_, index) => pointItem(fields, store, ground, index)),
       );
-      return [set, saidBelow(set), h('p', { class: 'list-actions' }, confirmLine())];
+      return [set, saidBelow(set), confirmLine()];
     },
   }).element;
   const element = h(
