@@ -88,7 +88,7 @@ export function deckField(graph: Graph, store: StudyStore): HTMLElement {
         { class: 'deck-field' },
         h('div', { class: 'deck-drawing' }, drawn, present.element, more, scaled),
         confirmAction(fields, store, {
-          words: 'Confirm the strips',
+          words: 'Confirm the deck',
           what: 'the deck',
           key: 'confirm.deck',
           paths: [list.join('.')],

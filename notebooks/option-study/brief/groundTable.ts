@@ -1,4 +1,4 @@
-import type { ProfilePoint } from '../../../lib/index.ts';
+import { isAssumed, type ProfilePoint, type Study } from '../../../lib/index.ts';
 import { fixed } from '../../format.ts';
 import { h, type HtmlChild } from '../../html.ts';
 import { standing, type Fields, type Path, type StudyStore } from '../../page/index.ts';
@@ -28,12 +28,11 @@ function pointAfter(ground: readonly ProfilePoint[], index: number): ProfilePoin
   };
 }
 
-function pointItem(
-  fields: Fields,
-  store: StudyStore,
-  ground: readonly ProfilePoint[],
-  index: number,
-): HTMLElement {
+/** Whether any of it is a start value still. */
+const isSketched = (study: Study): boolean => isAssumed(study, list.join('.'));
+
+function pointItem(fields: Fields, store: StudyStore, study: Study, index: number): HTMLElement {
+  const { ground } = study.brief.crossing;
   const at = (key: string): Path => [...list, index, key];
   const named = `ground point ${index + 1}`;
   const chainage = fixed(ground[index]!.chainageM, 1);
@@ -49,12 +48,13 @@ function pointItem(
     h(
       'span',
       { class: 'acts' },
-      confirmAction(fields, store, {
-        words: 'confirm',
-        what: named,
-        key: `confirm.ground.${index}`,
-        paths: [[...list, index].join('.')],
-      }),
+      isSketched(study) &&
+        confirmAction(fields, store, {
+          words: 'confirm',
+          what: named,
+          key: `confirm.ground.${index}`,
+          paths: [[...list, index].join('.')],
+        }),
       listAction('add', `add a point after ${chainage}`, `add.ground.${index}`, () => {
         store.edit(
           (study) => withEntry(study, list, index + 1, pointAfter(study.brief.crossing.ground, index)),
@@ -115,10 +115,11 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
 
   const points = standing(graph, store, {
     say: problemBeside,
-    shape: ({ brief }) => brief.crossing.ground.length,
-    build({ brief }, fields): HtmlChild {
-      const { ground } = brief.crossing;
-      const confirmLine = (): HTMLElement =>
+    shape: (study) => [study.brief.crossing.ground.length, isSketched(study)],
+    build(study, fields): HtmlChild {
+      const { ground } = study.brief.crossing;
+      const confirmLine = (): HtmlChild =>
+        isSketched(study) &&
         confirmAction(fields, store, {
           words: 'Confirm the ground line',
           what: 'the ground line',
@@ -143,7 +144,7 @@ export function groundTable(graph: Graph, store: StudyStore): HTMLElement {
       const set = h(
         'ol',
         { class: 'points', 'aria-label': 'Ground line: chainage above, level below' },
-        ground.map((_, index) => pointItem(fields, store, ground, index)),
+        ground.map((_, index) => pointItem(fields, store, study, index)),
       );
       return [set, saidBelow(set), confirmLine()];
     },
