@@ -1,5 +1,5 @@
 import type { Study } from '../model/index.ts';
-import { inOrder } from './assumed.ts';
+import { inOrder, namesField } from './assumed.ts';
 
 type Brief = Study['brief'];
 
@@ -34,7 +34,10 @@ const names: readonly (readonly [path: RegExp, name: (brief: Brief, index: numbe
 function named(brief: Brief, path: string): readonly [place: number, name: string] {
   const place = names.findIndex(([pattern]) => pattern.test(path));
   const row = names[place];
-  return row === undefined ? [names.length, path] : [place, row[1](brief, Number(row[0].exec(path)?.[1]))];
+  // A draft may list a path that leads nowhere.
+  return row === undefined || !namesField({ brief }, path)
+    ? [names.length, path]
+    : [place, row[1](brief, Number(row[0].exec(path)?.[1]))];
 }
 
 /**
@@ -46,7 +49,10 @@ export function startValues({ brief, assumed }: Study): string[] {
   return [...new Set(found.sort(([one], [other]) => one - other).map(([, name]) => name))];
 }
 
-/** The same in one line: '2 start values not confirmed: level of the road, ground line'; '' where there is none. */
+/** The name of the start value at a path. */
+export const startValueAt = ({ brief }: Study, path: string): string => named(brief, path)[1];
+
+/** All of them in one line: '2 start values not confirmed: level of the road, ground line'; '' where there is none. */
 export function startValueWords(study: Study): string {
   const found = startValues(study);
   const values = found.length === 1 ? 'start value' : 'start values';

@@ -116,6 +116,22 @@ describe('afterEdit(before, edited)', () => {
     expect(questions(agreed)).toEqual(questions(whole));
   });
 
+  it('goes on asking of a start value whose obstacle has another name', () => {
+    const named: Study = {
+      ...open,
+      assumed: ['brief.obstacles.0.fromM'],
+      decision: {
+        ...open.decision!,
+        questions: [`Start value not confirmed: width of ${study.brief.obstacles[0]!.name}.`],
+      },
+    };
+    const [first, ...others] = named.brief.obstacles;
+    const turned = { ...named.brief, obstacles: [{ ...first!, name: 'the Mill Beck' }, ...others] };
+    expect(questions(afterEdit(named, { ...named, brief: turned }))).toEqual([
+      'Start value not confirmed: width of the Mill Beck.',
+    ]);
+  });
+
   it('leaves a question that people have written over, and an issued decision, as they are', () => {
     const own = questions(open).map((words) => (words === level ? 'Ask the county for levels.' : words));
     const written: Study = { ...open, decision: { ...open.decision!, questions: own } };

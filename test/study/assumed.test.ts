@@ -144,5 +144,7 @@ describe('startValues(study)', () => {
     expect(startValueWords(study)).toMatch(/^3 start values not confirmed: widths/u);
     expect(startValueWords(marked('brief.loading'))).toBe('1 start value not confirmed: load standard');
     expect(startValueWords(lowFerry())).toBe('');
+    // In a draft whose list is refused too.
+    expect(startValues(marked('brief.obstacles.99.kind'))).toEqual(['brief.obstacles.99.kind']);
   });
 });

@@ -64,9 +64,14 @@ export function confirmAction(
   store: StudyStore,
   { words, what, key, paths }: ConfirmSpec,
 ): HTMLElement {
-  const action = listAction(words, `confirm ${what} as it stands`, key, () =>
-    store.edit((study) => confirmed(study, paths), { what: `confirming ${what}` }),
-  );
+  const action = listAction(words, `confirm ${what} as it stands`, key, () => {
+    const isByKey = action.matches(':focus-visible');
+    const [entry, part] = [action.closest('.point, .strip'), action.closest('.standing')];
+    store.edit((study) => confirmed(study, paths), { what: `confirming ${what}` });
+    // It goes with what it confirms; the keyboard stays with the figures.
+    const near = entry?.isConnected === true ? entry : part;
+    if (isByKey) near?.querySelector<HTMLElement>('.fig')?.focus();
+  });
   fields.follow([], (draft) =>
     action.toggleAttribute('hidden', !paths.some((path) => isAssumed(draft, path))),
   );
