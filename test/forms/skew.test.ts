@@ -35,14 +35,16 @@ describe.each(units)('size(%s) of a skew deck', (form, spansM, depthM) => {
   });
 
   it('carries more shear: more of what resists it, or more of its strength used', () => {
-    const all = [0, 20, 40, 60].map((skewDeg) => sized(form, spansM, depthM, { skewDeg }));
+    // Beyond that a box takes its ends square, and says so.
+    const skews = form === 'concrete-box' ? [0, 5, 10, 15] : [0, 20, 40, 60];
+    const all = skews.map((skewDeg) => sized(form, spansM, depthM, { skewDeg }));
     for (let i = 1; i < all.length; i++) {
       const [before, after] = [all[i - 1]!, all[i]!];
       const more =
         metal(after) > metal(before) + 1e-6 ||
         concrete(after) > concrete(before) + 1e-6 ||
         shearUse(after) > shearUse(before) + 1e-9;
-      expect(more, `${form} ${20 * i}`).toBe(true);
+      expect(more, `${form} ${skews[i]}`).toBe(true);
     }
   });
 

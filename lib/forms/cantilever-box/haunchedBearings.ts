@@ -1,6 +1,5 @@
 import type { Check, SupportReaction } from '../../model/index.ts';
-import { atSupports, END_SHARE } from '../common/skewTorque.ts';
-import { bearingChecks, bearingsApart } from '../concrete-box/boxBearings.ts';
+import { bearingChecks, bearingsApart, skewTurnings } from '../concrete-box/boxBearings.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedSkew } from './haunchedSkew.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';
@@ -35,9 +34,6 @@ export function haunchedBearingChecks(model: CantileverModel, box: SizedHaunched
   const at = <T>(values: ArrayLike<T>): T[] =>
     Array.from(model.beam.supportAt, (station) => values[station]!);
   const skew = haunchedSkew(model, box.sections, box.weight);
-  const lastingKNm = atSupports(skew.lastingKNm);
-  const trafficKNm = atSupports(skew.trafficKNm);
-  const { spansM } = model.task;
   const castIn = new Set(model.heldPiers.map(({ support }) => support));
   return bearingChecks(
     {
@@ -45,16 +41,7 @@ export function haunchedBearingChecks(model: CantileverModel, box: SizedHaunched
       ownKNm: box.weight.lastingKNm,
       depthM: at(model.depthM),
       bottomWidthM: at(box.sections.bottomWidthM),
-      skew: lastingKNm.map((lasting, j) => ({
-        lastingKNm: lasting,
-        trafficKNm: trafficKNm[j]!,
-        pressKN:
-          trafficKNm[j]! > 0
-            ? END_SHARE *
-              model.traffic.load.udlKNm *
-              Math.min(spansM[j - 1] ?? Infinity, spansM[j] ?? Infinity)
-            : 0,
-      })),
+      skew: skewTurnings(skew, model.task.spansM, model.traffic.load.udlKNm),
       onTwo: model.supportsM.map((_, j) => !castIn.has(j)),
     },
     haunchedReactions(model, box),

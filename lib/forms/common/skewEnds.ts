@@ -19,12 +19,13 @@ export function withSkewEnds(task: UnitTask, size: (task: UnitTask) => Design): 
   const skew = size(task);
   const lifts = skew.checks.find(({ id }) => id === 'bearing-uplift');
   const { skewTorqueKNm = 0, skewBearingKN = 0 } = skew.figures;
+  const priced = skew.obtuseCorner === undefined ? '; bearings are priced at their mean' : '';
   if (lifts === undefined || carries(lifts.utilisation))
     return {
       ...skew,
       warnings: [
         ...skew.warnings,
-        `${skewWords(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(skewTorqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(skewBearingKN / 1e3).toFixed(1)} MN more and the acute by as much less; bearings are priced at their mean.`,
+        `${skewWords(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(skewTorqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(skewBearingKN / 1e3).toFixed(1)} MN more and the acute by as much less${priced}.`,
       ],
     };
   const plain = size(square);

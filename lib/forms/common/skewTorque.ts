@@ -55,6 +55,18 @@ export function skewTorques(deck: TwistedDeck, momentKNm: ArrayLike<number>, ske
   return out;
 }
 
+/** Characteristic torques of skew ends by span, kNm, of the sign of the slope: of lasting loads and of traffic. */
+export interface SkewTorques {
+  readonly lastingKNm: readonly number[];
+  readonly trafficKNm: readonly number[];
+}
+
+/** On square supports. */
+export const noSkew = (spansM: readonly number[]): SkewTorques => {
+  const none = spansM.map(() => 0);
+  return { lastingKNm: none, trafficKNm: none };
+};
+
 /** Of a uniform load on an end span its end takes this much where the far end is held: what traffic presses a skew end by. */
 export const END_SHARE = 3 / 8;
 

@@ -33,8 +33,9 @@ export const anyBoxFigures = ({ check }: ReturnType<typeof formManual>): readonl
   ...check(
     'bearing-uplift',
     [
-      'torque of eccentric traffic, of M / R of the curve and of vehicles that push outwards by the distance of the bearings, less the least load that makes it',
+      'torque of eccentric traffic, of M / R of the curve, of vehicles that push outwards and of skew ends by the distance of the bearings, less the least load that makes it',
       'spans',
+      './task/skewDeg?',
       './task/deck/carriagewayM',
       './task/planRadiusM',
       'bearingsApartM',

@@ -3,8 +3,9 @@ import { beamTrack, deflectionInfluence } from '../../mechanics/index.ts';
 import type { Check, SupportReaction } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
 import { middleStation } from '../common/middleStation.ts';
-import { bearingChecks } from './boxBearings.ts';
+import { bearingChecks, skewTurnings } from './boxBearings.ts';
 import { boxData } from './boxData.ts';
+import { boxSkew } from './boxSkew.ts';
 import { boxService } from './boxService.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxTraffic } from './boxTraffic.ts';
@@ -78,6 +79,7 @@ export function boxChecks(model: BoxModel, box: SizedBox, reactions: readonly Su
         depthM: reactions.map(() => model.task.depthM),
         bottomWidthM: reactions.map(() => box.sections.span.bottomWidthM),
         onTwo: reactions.map(() => true),
+        skew: skewTurnings(boxSkew(model, box), model.task.spansM, model.traffic.load.udlKNm),
       },
       reactions,
     ),

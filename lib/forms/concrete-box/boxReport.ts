@@ -1,10 +1,12 @@
 import type { SupportReaction } from '../../model/index.ts';
+import { skewFigures } from '../common/skewEnds.ts';
 import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
 import { bearingsApart } from './boxBearings.ts';
 import { madeFigures } from './boxConcrete.ts';
 import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
+import { boxSkew, boxSkewKNm } from './boxSkew.ts';
 import { betweenZeros, workingWidthM } from './shearLag.ts';
 import type { SizedBox } from './sizeBox.ts';
 import type { Struts } from './struts.ts';
@@ -53,6 +55,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
   const { layout, beam, task, traffic, lengthM } = model;
   const { sections, tendons, own, thicknesses } = box;
   const areaM2 = lengthM * task.deck.widthM;
+  const apartM = bearingsApart(sections.span.bottomWidthM);
   const underM3 = underSlabM3M(layout, task.depthM) * lengthM;
   const concreteM3 = underM3 + own.boxM3 + own.blistersM3 + own.diaphragmM3.reduce((sum, m3) => sum + m3, 0);
   const barsKg = boxBars(model, box).totalKg + underSlabBarsKg(layout, underM3, lengthM);
@@ -80,7 +83,8 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     pierAreaM2: sections.pier.areaM2,
     pierInertiaM4: sections.pier.inertiaM4,
     enclosedAreaM2: box.shear.enclosedM2,
-    bearingsApartM: bearingsApart(sections.span.bottomWidthM),
+    bearingsApartM: apartM,
+    ...skewFigures(boxSkewKNm(model, boxSkew(model, box)), apartM),
     webTrafficShare: box.shear.webShare,
     tendonCount: tendons.group.tendonsPerWeb * layout.webs,
     strandsPerTendon: tendons.group.strandsPerTendon,

@@ -5,6 +5,7 @@ import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
 import { obtuseOf } from '../common/obtuse.ts';
 import { curveWarning } from '../common/curveWarning.ts';
+import { withSkewEnds } from '../common/skewEnds.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { boxChecks } from './boxChecks.ts';
@@ -37,7 +38,7 @@ export const concreteBox: FormModule = {
       method,
       depthBand('concrete-box', spansM.length > 1 ? 'continuous' : 'simple', method)[1],
     ),
-  size,
+  size: (task) => withSkewEnds(task, size),
 };
 
 /** @throws RangeError for spans, depth, widths or concrete that are not possible */
