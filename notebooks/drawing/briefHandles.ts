@@ -3,12 +3,12 @@ import type { Obstacle, Site } from '../model.ts';
 import { groundLevel } from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { bracketWords } from './barred.ts';
-import { handle, typedFigure } from './handle.ts';
+import type { HandleSpec, TypedSpec } from './handle.ts';
 import type { Hold } from './hold.ts';
 import { colours, letters, pens } from './ink.ts';
 import { textWidth } from './lettering.ts';
 import type { Piece } from './piece.ts';
-import { el, g, num } from './piece.ts';
+import { el, num } from './piece.ts';
 
 /** Dashed mark of a length of 40 px where a handle was taken. */
 const wasAt = (x: number, y: number, isUp: boolean): Piece =>
@@ -22,19 +22,19 @@ const wasAt = (x: number, y: number, isUp: boolean): Piece =>
 /** An end of an obstacle. */
 type End = 'from' | 'to';
 
-/** Handle of an edge of an obstacle, at a height y; null off the drawing. */
-function edgeHandle(
+/** Handle of an edge of an obstacle, at a height y; none off the drawing. */
+function edgeSpecs(
   site: Site,
   [index, { name, fromM, toM }]: readonly [number, Obstacle],
   end: End,
   frame: Frame,
   y: number,
   hold: Hold | null,
-): Piece | null {
+): HandleSpec[] {
   const at = end === 'from' ? fromM : toM;
-  if (at < frame.fromM || at > frame.toM) return null;
+  if (at < frame.fromM || at > frame.toM) return [];
   const key = `obstacle/${String(index)}/${end}`;
-  return handle(
+  return [
     {
       key,
       name: `${name}, ${end} chainage`,
@@ -48,64 +48,55 @@ function edgeHandle(
       y,
       before: hold?.key === key ? wasAt(frame.x(hold.valueM), y, false) : null,
     },
-    hold,
+  ];
+}
+
+/** The width of the main opening over its bracket, on a level line at y, where one obstacle alone makes it. */
+function openingSpecs(site: Site, obstacles: readonly Obstacle[], frame: Frame, y: number): TypedSpec[] {
+  const opening = site.mainOpening;
+  if (opening === null) return [];
+  const index = obstacles.findIndex(
+    ({ supports, fromM, toM }) => supports === 'hard' && fromM === opening.fromM && toM === opening.toM,
   );
+  const whole = obstacles[index];
+  const words = bracketWords(site, frame, y).find(({ isMain }) => isMain);
+  if (whole === undefined || words === undefined) return [];
+  return [
+    {
+      key: `width/${String(index)}`,
+      name: `${whole.name}, width without a pier`,
+      valueM: opening.widthM,
+      leastM: 1,
+      mostM: 2000,
+      places: 1,
+      words: `${fixed(opening.widthM, 1)} m`,
+      x: words.x,
+      y: words.y - 4,
+      widthPx: textWidth(words.words, letters.drawing),
+    },
+  ];
 }
 
 /**
- * What a small drawing lets be taken hold of: the edges of the main opening at their bracket, on a level line at y, and its
- * width where one obstacle alone makes it.
+ * Handles of what the brief says of the crossing: edges of obstacles, headroom over them, road levels at both ends.
+ * @param bracketsY level line of the brackets over barred stretches, whose ends and width are taken there; null where there
+ * are none and all edges are taken at the ground
  */
-export function openingHandles(
-  site: Site,
-  obstacles: readonly Obstacle[],
-  frame: Frame,
-  y: number,
-  hold: Hold | null,
-): Piece | null {
-  const opening = site.mainOpening;
-  if (opening === null) return null;
-  const ends = [...obstacles.entries()]
-    .filter(([, { supports }]) => supports === 'hard')
-    .map((entry) => ({
-      entry,
-      edges: (['from', 'to'] as const).filter((end) => entry[1][`${end}M`] === opening[`${end}M`]),
-    }));
-  const whole = ends.find(({ edges }) => edges.length === 2)?.entry;
-  const words = bracketWords(site, frame, y).find(({ isMain }) => isMain);
-  return g(
-    { class: 'handles of-brief' },
-    whole !== undefined &&
-      words !== undefined &&
-      typedFigure({
-        key: `width/${String(whole[0])}`,
-        name: `${whole[1].name}, width without a pier`,
-        valueM: opening.widthM,
-        leastM: 1,
-        mostM: 2000,
-        places: 1,
-        words: `${fixed(opening.widthM, 1)} m`,
-        x: words.x,
-        y: words.y - 4,
-        widthPx: textWidth(words.words, letters.drawing),
-      }),
-    ends.flatMap(({ entry, edges }) => edges.map((end) => edgeHandle(site, entry, end, frame, y, hold))),
-  );
-}
-
-/** Handles of what the brief says of the crossing: edges of obstacles, headroom over them, road levels at both ends. */
 export function briefHandles(
   site: Site,
   obstacles: readonly Obstacle[],
   frame: Frame,
+  bracketsY: number | null,
   hold: Hold | null,
-): Piece {
+): (HandleSpec | TypedSpec)[] {
   const isHeld = (key: string): boolean => hold?.key === key;
   const inFrame = (at: number): boolean => at >= frame.fromM && at <= frame.toM;
   const edges = [...obstacles.entries()].flatMap((entry) =>
-    (['from', 'to'] as const).map((end) =>
-      edgeHandle(site, entry, end, frame, frame.y(groundLevel(site, entry[1][`${end}M`])) + 12, hold),
-    ),
+    (['from', 'to'] as const).flatMap((end) => {
+      const { supports, [`${end}M` as const]: at } = entry[1];
+      const y = bracketsY !== null && supports === 'hard' ? bracketsY : frame.y(groundLevel(site, at)) + 12;
+      return edgeSpecs(site, entry, end, frame, y, hold);
+    }),
   );
   const clearances = obstacles.flatMap(({ name, clearance }, index) => {
     if (clearance === null) return [];
@@ -113,44 +104,39 @@ export function briefHandles(
     if (!inFrame(at)) return [];
     const key = `clearance/${String(index)}`;
     const [x, y] = [frame.x(at), frame.y(clearance.datumLevelM + clearance.headroomM)];
-    return handle(
-      {
-        key,
-        name: `headroom over ${name}`,
-        valueM: clearance.headroomM,
-        leastM: 0.5,
-        mostM: Math.max(100, clearance.headroomM),
-        places: 2,
-        words: `${level(clearance.headroomM)} clear`,
-        perPx: [0, -1 / frame.pxPerM],
-        x,
-        y,
-        before: isHeld(key) ? wasAt(x, y + (clearance.headroomM - hold!.valueM) * frame.pxPerM, true) : null,
-      },
-      hold,
-    );
+    return {
+      key,
+      name: `headroom over ${name}`,
+      valueM: clearance.headroomM,
+      leastM: 0.5,
+      mostM: Math.max(100, clearance.headroomM),
+      places: 2,
+      words: `${level(clearance.headroomM)} clear`,
+      perPx: [0, -1 / frame.pxPerM] as const,
+      x,
+      y,
+      before: isHeld(key) ? wasAt(x, y + (clearance.headroomM - hold!.valueM) * frame.pxPerM, true) : null,
+    };
   });
   const { startLevelM, endLevelM } = site.road;
   const road = ([site.startM, site.endM] as const).map((at, i) => {
     const key = i === 0 ? 'road/start' : 'road/end';
     const levelM = i === 0 ? startLevelM : endLevelM;
     const [x, y] = [frame.x(at) + (i === 0 ? -16 : 16), frame.y(levelM)];
-    return handle(
-      {
-        key,
-        name: `road level at ${i === 0 ? 'A' : 'B'}`,
-        valueM: levelM,
-        leastM: levelM - 200,
-        mostM: levelM + 200,
-        places: 2,
-        words: `road ${level(levelM)}`,
-        perPx: [0, -1 / frame.pxPerM],
-        x,
-        y,
-        before: isHeld(key) ? wasAt(x, y + (levelM - hold!.valueM) * frame.pxPerM, true) : null,
-      },
-      hold,
-    );
+    return {
+      key,
+      name: `road level at ${i === 0 ? 'A' : 'B'}`,
+      valueM: levelM,
+      leastM: levelM - 200,
+      mostM: levelM + 200,
+      places: 2,
+      words: `road ${level(levelM)}`,
+      perPx: [0, -1 / frame.pxPerM] as const,
+      x,
+      y,
+      before: isHeld(key) ? wasAt(x, y + (levelM - hold!.valueM) * frame.pxPerM, true) : null,
+    };
   });
-  return g({ class: 'handles of-brief' }, edges, clearances, road);
+  const width = bracketsY === null ? [] : openingSpecs(site, obstacles, frame, bracketsY);
+  return [...width, ...edges, ...clearances, ...road];
 }

@@ -22,16 +22,16 @@ import type { Paper } from './ink.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
 import { textWidth } from './lettering.ts';
-import { briefHandles, openingHandles } from './briefHandles.ts';
+import { briefHandles } from './briefHandles.ts';
+import { handles } from './handles.ts';
 import {
   barredPiers,
-  depthHandle,
   freeBar,
+  optionHandles,
   pierBays,
   spanChanges,
-  spanFigures,
   supportFeet,
-  supportHandles,
+  withChange,
   type InHand,
 } from './supportHandles.ts';
 import { placer } from './placer.ts';
@@ -57,29 +57,19 @@ export interface CrossingInput {
   /** Data band under the elevation; on unless said otherwise, and off at 1:2000 and smaller. */
   readonly band?: boolean;
   readonly bar?: boolean;
-  /** Piers, depth, spans and what the brief says can be taken hold of; of a small drawing the barred stretch alone. */
+  /** Piers, depth, spans and what the brief says can be taken hold of. */
   readonly handles?: InHand;
   readonly prefix?: string;
 }
 
-/**
- * What a crossing on a sheet has room for: lettering with handles to take hold of, where a deck is more than a line, and a
- * band of figures that do not stand too close.
- */
+/** What a crossing on a sheet has room for: lettering, where a deck is more than a line, and a band of figures that do not stand too close. */
 export const crossingHas = (
   scale: Scale,
   widthPx: number,
-): { readonly handles: boolean; readonly band: boolean } => ({
-  handles: scale < 2000,
+): { readonly lettering: boolean; readonly band: boolean } => ({
+  lettering: scale < 2000,
   band: scale <= 2000 && widthPx >= 480,
 });
-
-/** A span with what it has changed by where there is room for both; nothing where it would touch its neighbours. */
-function withChange(figure: string, change: string, spanM: number, frame: Frame, size: number): string {
-  const room = spanM * frame.pxPerM;
-  if (textWidth(figure + change, letters.table) + 6 < room) return figure + change;
-  return textWidth(figure, size) + 3 < room || room > 26 ? figure : '';
-}
 
 /** Gradient of a straight road at its left end; over a crest those at both abutments with its radius. */
 function gradients(site: Site, option: AppraisedOption, frame: Frame): Piece {
@@ -151,7 +141,7 @@ export function crossing(input: CrossingInput): Piece {
   const prefix = input.prefix ?? 'crossing';
   const scale = input.scale ?? scaleOnSheet(site, widthPx);
   const has = crossingHas(scale, widthPx);
-  const small = !has.handles;
+  const small = !has.lettering;
   const withBand = input.band ?? has.band;
   const withBar = input.bar ?? true;
   const range = levelRange(site, option, !small);
@@ -253,8 +243,7 @@ export function crossing(input: CrossingInput): Piece {
         below,
         option !== null && !small && barredPiers(site, option, frame, ink.accent),
         option !== null &&
-          hands !== undefined &&
-          !small && [
+          hands !== undefined && [
             supportFeet(site, option, frame, bodyEnd + 6, hands.locked),
             freeBar(site, option, frame, bodyEnd + 14, hands.hold),
           ],
@@ -274,13 +263,7 @@ export function crossing(input: CrossingInput): Piece {
           inside.map(frame.x),
           dimensionBottom,
           figures.map((figure, i) =>
-            withChange(
-              figure,
-              changes[i] ?? '',
-              (inside[i + 1] ?? 0) - (inside[i] ?? 0),
-              frame,
-              dimensionSize,
-            ),
+            withChange(figure, changes[i] ?? '', ((inside[i + 1] ?? 0) - (inside[i] ?? 0)) * frame.pxPerM),
           ),
           {
             weight: 600,
@@ -291,20 +274,20 @@ export function crossing(input: CrossingInput): Piece {
         ),
       band?.piece,
       small && barredBrackets(site, frame, bracketsY, ink.accent),
-      hands !== undefined &&
-        small &&
-        input.obstacles !== undefined &&
-        openingHandles(site, input.obstacles, frame, bracketsY, hands.hold),
-      hands !== undefined &&
-        !small && [
-          input.obstacles !== undefined && briefHandles(site, input.obstacles, frame, hands.hold),
-          option !== null && [
-            pierBays(site, option, frame),
-            spanFigures(option, frame, dimensionBottom - 8),
-            depthHandle(site, option, frame, hands.hold),
-            supportHandles(site, option, frame, hands),
+      hands !== undefined && [
+        option !== null && pierBays(site, option, frame),
+        handles(
+          [
+            ...(option === null ? [] : optionHandles(site, option, frame, dimensionBottom - 8, hands)),
+            ...(input.obstacles === undefined
+              ? []
+              : briefHandles(site, input.obstacles, frame, small ? bracketsY : null, hands.hold)),
           ],
-        ],
+          { left: 0, top: 0, right: width, bottom: datum.y },
+          hands.hold,
+          prefix,
+        ),
+      ],
       withBar &&
         scaleBar(scale, Math.max(frame.x(site.startM), 8), afterBand + 26, {
           rightPx: width,

@@ -1,6 +1,9 @@
-import { colours, pens } from './ink.ts';
+import { colours, letters, pens } from './ink.ts';
 import type { Hold } from './hold.ts';
 import { label } from './label.ts';
+import { textWidth } from './lettering.ts';
+import type { Shift } from './handlesApart.ts';
+import { LEAST_TARGET_PX } from './handlesApart.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 
@@ -31,6 +34,9 @@ export interface HandleSpec {
 /** Half the side of the square that answers to a pointer, px. */
 const REACH_PX = 13;
 
+/** Size of the target of a handle, px. */
+export const handlePx: readonly [width: number, height: number] = [2 * REACH_PX, 2 * REACH_PX];
+
 const attrsOf = ({ key, name, valueM, leastM, mostM, places, words, perPx }: HandleSpec) => ({
   'data-key': key,
   'data-handle': key,
@@ -45,23 +51,56 @@ const attrsOf = ({ key, name, valueM, leastM, mostM, places, words, perPx }: Han
   'aria-valuetext': words,
 });
 
+/** Classes of a handle; what has no place of its own answers to keys alone. */
+const classOf = (shift: Shift, ...names: readonly (string | false)[]): string =>
+  ['handle', ...names, shift === null && 'keyed'].filter((name) => name !== false).join(' ');
+
+/** Thin line from a handle that had to be moved to what it moves. */
+const leader = ({ x, y }: HandleSpec, toX: number, toY: number): Piece | null =>
+  Math.hypot(toX - x, toY - y) < REACH_PX / 2
+    ? null
+    : el('path', {
+        d: `M${num(x)},${num(y)}L${num(toX)},${num(toY)}`,
+        stroke: colours.second,
+        'stroke-width': pens.fine,
+      });
+
+/** Words of a handle in hand: where they are wanted, else beside it, on the side that is on the sheet. */
+function heldWords({ words, wordsAt }: HandleSpec, x: number, y: number, rightPx: number): Piece {
+  const half = textWidth(words, letters.drawing, 600) / 2;
+  if (wordsAt !== undefined) {
+    const middle = Math.max(Math.min(wordsAt[0], rightPx - half), half);
+    return label(middle, wordsAt[1], words, { weight: 600, halo: true, anchor: 'middle' });
+  }
+  const isRoom = x + 14 + 2 * half <= rightPx;
+  return label(isRoom ? x + 14 : x - 14, y - 9, words, {
+    weight: 600,
+    halo: true,
+    anchor: isRoom ? 'start' : 'end',
+  });
+}
+
 /**
  * A handle: an open square of 6.2 px with a tick either side at 7.6, the way it moves; solid where it is locked. It is a
  * slider for keys and readers.
+ * @param shift how far it stands from where it is wanted, px; null leaves it to keys alone
+ * @param rightPx right end of the sheet
  */
-export function handle(spec: HandleSpec, hold: Hold | null): Piece {
-  const { key, x, y, perPx, isLocked = false } = spec;
+export function handle(spec: HandleSpec, hold: Hold | null, shift: Shift, rightPx: number): Piece {
+  const { key, perPx, isLocked = false } = spec;
+  const [x, y] = [spec.x + (shift?.[0] ?? 0), spec.y + (shift?.[1] ?? 0)];
   const isUp = perPx[1] !== 0;
   const isHeld = hold?.key === key;
   const side = isHeld ? 7.6 : 6.2;
   return g(
     {
-      class: isUp ? 'handle updown' : isLocked ? 'handle locked' : 'handle',
+      class: classOf(shift, isUp ? 'updown' : isLocked && 'locked'),
       role: 'slider',
       'aria-orientation': isUp ? 'vertical' : undefined,
       ...attrsOf(spec),
     },
     isHeld && spec.before,
+    leader(spec, x, y),
     el('rect', {
       class: 'grip',
       x: x - REACH_PX,
@@ -89,12 +128,7 @@ export function handle(spec: HandleSpec, hold: Hold | null): Piece {
         stroke: colours.ink,
         'stroke-width': pens.medium,
       }),
-    isHeld &&
-      label(...(spec.wordsAt ?? ([x + 14, y - 9] as const)), spec.words, {
-        weight: 600,
-        halo: true,
-        anchor: spec.wordsAt === undefined ? 'start' : 'middle',
-      }),
+    isHeld && heldWords(spec, x, y, rightPx),
   );
 }
 
@@ -103,22 +137,36 @@ export interface TypedSpec extends Omit<HandleSpec, 'perPx' | 'isLocked' | 'befo
   readonly widthPx: number;
 }
 
-/** A figure that is typed over where it stands, or stepped with the arrow keys. Lies over its lettering. */
-export function typedFigure(spec: TypedSpec): Piece {
-  const { x, y, widthPx } = spec;
+/** What the target of a figure is wider than its lettering, px. */
+export const TYPED_AIR_PX = 6;
+
+/** Size of the target of a figure that is typed over: its lettering with some air, never less than a target, px. */
+export const typedPx = ({ widthPx }: TypedSpec): readonly [width: number, height: number] => [
+  Math.max(widthPx + TYPED_AIR_PX, LEAST_TARGET_PX),
+  LEAST_TARGET_PX,
+];
+
+/**
+ * A figure that is typed over where it stands, or stepped with the arrow keys. Lies over its lettering.
+ * @param shift null leaves it to keys alone
+ */
+export function typedFigure(spec: TypedSpec, shift: Shift): Piece {
+  const { widthPx } = spec;
+  const [x, y] = [spec.x + (shift?.[0] ?? 0), spec.y + (shift?.[1] ?? 0)];
+  const [width, height] = typedPx(spec);
   return g(
-    { class: 'handle typed', role: 'spinbutton', ...attrsOf({ ...spec, perPx: [0, 0] }) },
+    { class: classOf(shift, 'typed'), role: 'spinbutton', ...attrsOf({ ...spec, perPx: [0, 0] }) },
     el('rect', {
       class: 'grip',
-      x: x - widthPx / 2 - 3,
-      y: y - 9,
-      width: widthPx + 6,
-      height: 18,
+      x: x - width / 2,
+      y: y - height / 2,
+      width,
+      height,
       fill: colours.sheet,
       'fill-opacity': 0,
     }),
     el('path', {
-      d: `M${num(x - widthPx / 2)},${num(y + 7)}h${num(widthPx)}`,
+      d: `M${num(spec.x - widthPx / 2)},${num(spec.y + 7)}h${num(widthPx)}`,
       stroke: colours.ink,
       'stroke-width': pens.thin,
     }),

@@ -9,13 +9,13 @@ import { frameOf } from './frame.ts';
 import { colours, letters, pens } from './ink.ts';
 import { interval } from './interval.ts';
 import { label } from './label.ts';
-import { textWidth } from './lettering.ts';
 import { formBuilt, mainSpan } from './optionWords.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { sheet } from './sheet.ts';
 import type { StackRow, StackSheet } from './stackSheet.ts';
-import { chosenRow, rowNumber, stackOutset } from './stackSheet.ts';
+import { chosenRow, rowHandles, rowNumber, stackOutset } from './stackSheet.ts';
+import { barredPiers, freeBar, spanChanges, supportFeet, withChange } from './supportHandles.ts';
 
 /** One row for a hand-held screen: number, glyph, name and P50; solid deck; spans; interval; three figures. */
 function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): StackRow {
@@ -37,7 +37,9 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
   const within = input.standing.within[option.number];
   const name = formBuilt(option);
   const second: { size: number; fill: string } = { size: letters.table, fill: colours.second };
-  const piece = chosenRow(shared, option, top, height, [
+  const hands = reference ? input.hands : undefined;
+  const changes = spanChanges(option, hands?.hold ?? null);
+  const children = [
     rowNumber(shared, option, 12, titleY - 6, 11.5),
     glyph(option.form, 32, titleY - 14, ink.line(option.form)),
     label(72, titleY, name, { size: letters.prose, weight: reference ? 600 : 400 }),
@@ -49,6 +51,7 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
     }),
     barredWash(site, frame, titleY + 10, spanY + 4),
     elevationBody(site, option, frame, ink, range, { plain: true }),
+    barredPiers(site, option, frame, ink.accent),
     el('path', {
       d: chainages.map((at) => `M${num(frame.x(at))},${num(spanY - 8)}v9`).join(''),
       stroke: colours.third,
@@ -57,8 +60,8 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
     g(
       {},
       spans.map((span, index) => {
-        const figure = length(span);
-        return textWidth(figure, letters.drawing) + 3 < span * frame.pxPerM
+        const figure = withChange(length(span), changes[index] ?? '', span * frame.pxPerM);
+        return figure !== ''
           ? label(frame.x((chainages[index] ?? 0) + span / 2), spanY, figure, {
               anchor: 'middle',
               weight: index === mainSpan(option) ? 600 : 400,
@@ -67,6 +70,8 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
           : null;
       }),
     ),
+    hands !== undefined && supportFeet(site, option, frame, spanY + 1, hands.locked),
+    hands !== undefined && freeBar(site, option, frame, spanY + 8, hands.hold),
     interval(option, axis.x, intervalY, ink),
     input.budget !== null &&
       el('path', {
@@ -90,7 +95,12 @@ function narrowRow(shared: StackSheet, option: AppraisedOption, top: number): St
         anchor: 'end',
         figure: withinOf(option),
       }),
-  ]);
+  ];
+  const taken =
+    hands === undefined
+      ? []
+      : rowHandles(shared, option, frame, spanY - 4, hands, { rightPx: shared.sheetPx, height });
+  const piece = chosenRow(shared, option, top, height, children, taken);
   return { piece, bottom: top + height, frame };
 }
 

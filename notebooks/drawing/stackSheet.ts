@@ -9,7 +9,8 @@ import type { Frame } from './frame.ts';
 import type { Paper } from './ink.ts';
 import { colours, pens } from './ink.ts';
 import type { Piece } from './piece.ts';
-import type { InHand } from './supportHandles.ts';
+import { handles } from './handles.ts';
+import { optionHandles, pierBays, type InHand } from './supportHandles.ts';
 import { el, g, num } from './piece.ts';
 import type { Scale } from './scale.ts';
 
@@ -121,6 +122,27 @@ export function chosenRow(
         'stroke-width': pens.heavy,
       }),
   );
+}
+
+/** What of an option can be taken hold of in its row, spans in their dimension line with their middle at `spanY`. */
+export function rowHandles(
+  { input }: StackSheet,
+  option: AppraisedOption,
+  frame: Frame,
+  spanY: number,
+  hands: InHand,
+  { rightPx, height }: { readonly rightPx: number; readonly height: number },
+): Piece[] {
+  const { site, prefix } = input;
+  return [
+    pierBays(site, option, frame),
+    handles(
+      optionHandles(site, option, frame, spanY, hands),
+      { left: 0, top: 0, right: rightPx, bottom: height },
+      hands.hold,
+      prefix ?? 'stack',
+    ),
+  ];
 }
 
 /** Number in its circle: filled for the reference, ring in the form's colour for the others, grey when out. */

@@ -12,7 +12,8 @@ import {
 } from './alongOption.ts';
 import type { Frame } from './frame.ts';
 import { barredAt, freeStretches, type Stretch } from './freeStretches.ts';
-import { handle, typedFigure } from './handle.ts';
+import type { HandleSpec, TypedSpec } from './handle.ts';
+import { TYPED_AIR_PX } from './handle.ts';
 import type { Hold } from './hold.ts';
 import { colours, letters, pens } from './ink.ts';
 import { label } from './label.ts';
@@ -54,48 +55,41 @@ function roomOf(site: Site, at: readonly number[], index: number): Stretch | nul
 }
 
 /** Handles of the supports that may move, piers halfway up the shaft. In hand: the old place dashed. */
-export function supportHandles(
+function supportSpecs(
   site: Site,
   option: AppraisedOption,
   frame: Frame,
   { hold, locked }: InHand,
-): Piece {
+): HandleSpec[] {
   const at = supportChainages(option);
-  return g(
-    { class: 'handles' },
-    at.map((chainageM, index) => {
-      if (chainageM < frame.fromM || chainageM > frame.toM) return null;
-      const support = option.supports.find((one) => Math.abs(one.chainageM - chainageM) < 0.06);
-      const room = roomOf(site, at, index);
-      if (support === undefined || room === null) return null;
-      const key = keyOf(index, at.length - 1);
-      const [top, foot] = [frame.y(support.topLevelM), frame.y(support.groundLevelM)];
-      const isLocked = locked.includes(index);
-      return handle(
-        {
-          key,
-          name: `${supportName(index, at.length)}, chainage${isLocked ? ', locked' : ''}`,
-          valueM: chainageM,
-          leastM: room.fromM,
-          mostM: room.toM,
-          places: 1,
-          words: `ch ${fixed(chainageM, 1)}`,
-          perPx: [1 / frame.pxPerM, 0],
-          x: frame.x(chainageM),
-          y: (top + foot) / 2,
-          isLocked,
-          wordsAt: [frame.x(chainageM), top - 14 - frame.pxPerM * 3],
-          before: el('path', {
-            d: `M${num(frame.x(hold?.valueM ?? chainageM))},${num(top)}V${num(foot)}`,
-            stroke: colours.second,
-            'stroke-width': pens.thin,
-            'stroke-dasharray': '5 3',
-          }),
-        },
-        hold,
-      );
-    }),
-  );
+  return at.flatMap((chainageM, index) => {
+    if (chainageM < frame.fromM || chainageM > frame.toM) return [];
+    const support = option.supports.find((one) => Math.abs(one.chainageM - chainageM) < 0.06);
+    const room = roomOf(site, at, index);
+    if (support === undefined || room === null) return [];
+    const [top, foot] = [frame.y(support.topLevelM), frame.y(support.groundLevelM)];
+    const isLocked = locked.includes(index);
+    return {
+      key: keyOf(index, at.length - 1),
+      name: `${supportName(index, at.length)}, chainage${isLocked ? ', locked' : ''}`,
+      valueM: chainageM,
+      leastM: room.fromM,
+      mostM: room.toM,
+      places: 1,
+      words: `ch ${fixed(chainageM, 1)}`,
+      perPx: [1 / frame.pxPerM, 0],
+      x: frame.x(chainageM),
+      y: (top + foot) / 2,
+      isLocked,
+      wordsAt: [frame.x(chainageM), top - 14 - frame.pxPerM * 3],
+      before: el('path', {
+        d: `M${num(frame.x(hold?.valueM ?? chainageM))},${num(top)}V${num(foot)}`,
+        stroke: colours.second,
+        'stroke-width': pens.thin,
+        'stroke-dasharray': '5 3',
+      }),
+    };
+  });
 }
 
 /** Below each support a circle where it is free to move, a solid triangle where it is locked; nothing where it is fixed. */
@@ -184,14 +178,9 @@ export function barredPiers(site: Site, option: AppraisedOption, frame: Frame, a
 }
 
 /** Handle of the depth, on the soffit in the middle of the longest span of the main unit. */
-export function depthHandle(
-  site: Site,
-  option: AppraisedOption,
-  frame: Frame,
-  hold: Hold | null,
-): Piece | null {
+function depthSpecs(site: Site, option: AppraisedOption, frame: Frame, hold: Hold | null): HandleSpec[] {
   const main = placedUnits(option).find(({ unit }) => unit.role === 'main');
-  if (main === undefined) return null;
+  if (main === undefined) return [];
   const { supportsM } = main.unit;
   const spans = supportsM.slice(1).map((x, i) => x - supportsM[i]!);
   const longest = spans.indexOf(Math.max(...spans));
@@ -200,9 +189,9 @@ export function depthHandle(
   const { depthM } = main.design.task;
   const x = frame.x(chainageM);
   const y = frame.y(soffitLevel(site, option, chainageM));
-  if (!Number.isFinite(y)) return null;
+  if (!Number.isFinite(y)) return [];
   const was = y + ((hold?.valueM ?? depthM) - depthM) * frame.pxPerM;
-  return handle(
+  return [
     {
       key: 'depth',
       name: `depth at midspan of option ${String(option.number)}`,
@@ -221,8 +210,7 @@ export function depthHandle(
         'stroke-dasharray': '5 3',
       }),
     },
-    hold,
-  );
+  ];
 }
 
 /** What each span has changed by since the pier was taken, in words; empty where it has not. */
@@ -233,6 +221,13 @@ export function spanChanges(option: AppraisedOption, hold: Hold | null): string[
     const change = span - ((before[i + 1] ?? NaN) - (before[i] ?? NaN));
     return Math.abs(change) < 0.05 ? '' : ` (${change < 0 ? '−' : '+'}${Math.abs(change).toFixed(1)})`;
   });
+}
+
+/** A span with what it has changed by where there is room for both; nothing where it would touch its neighbours. */
+export function withChange(figure: string, change: string, roomPx: number): string {
+  const whole = figure + change;
+  if (textWidth(whole, letters.table) + 6 < roomPx) return whole;
+  return textWidth(figure, letters.drawing) + 3 < roomPx || roomPx > 26 ? figure : '';
 }
 
 /**
@@ -262,27 +257,40 @@ export function pierBays(site: Site, option: AppraisedOption, frame: Frame): Pie
   );
 }
 
-/** The spans of an option as figures that are typed over in their dimension line at y. */
-export function spanFigures(option: AppraisedOption, frame: Frame, y: number): Piece {
+/** The spans of an option as figures that are typed over in their dimension line, their middle at y. */
+function spanSpecs(option: AppraisedOption, frame: Frame, y: number): TypedSpec[] {
   const at = supportChainages(option);
-  return g(
-    { class: 'handles spans' },
-    spansOf(option).map((spanM, i) => {
-      const middleM = (at[i]! + at[i + 1]!) / 2;
-      const widthPx = textWidth(fixed(spanM, 1), letters.table);
-      if (middleM < frame.fromM || middleM > frame.toM || widthPx + 4 > spanM * frame.pxPerM) return null;
-      return typedFigure({
-        key: `span/${String(i)}`,
-        name: `span ${String(i + 1)}`,
-        valueM: spanM,
-        leastM: APART_M,
-        mostM: at.at(-1)! - at[0]!,
-        places: 1,
-        words: `${fixed(spanM, 1)} m`,
-        x: frame.x(middleM),
-        y,
-        widthPx,
-      });
-    }),
-  );
+  return spansOf(option).flatMap((spanM, i) => {
+    const middleM = (at[i]! + at[i + 1]!) / 2;
+    if (middleM < frame.fromM || middleM > frame.toM) return [];
+    return {
+      key: `span/${String(i)}`,
+      name: `span ${String(i + 1)}`,
+      valueM: spanM,
+      leastM: APART_M,
+      mostM: at.at(-1)! - at[0]!,
+      places: 1,
+      words: `${fixed(spanM, 1)} m`,
+      x: frame.x(middleM),
+      y,
+      // No more than its span, from which its neighbours begin.
+      widthPx: Math.min(textWidth(fixed(spanM, 1), letters.table), spanM * frame.pxPerM - TYPED_AIR_PX),
+    };
+  });
 }
+
+/**
+ * What of an option can be taken hold of in its elevation: spans in their dimension line, their middle at `spanY`, supports
+ * that may move, and depth.
+ */
+export const optionHandles = (
+  site: Site,
+  option: AppraisedOption,
+  frame: Frame,
+  spanY: number,
+  hands: InHand,
+): (HandleSpec | TypedSpec)[] => [
+  ...spanSpecs(option, frame, spanY),
+  ...supportSpecs(site, option, frame, hands),
+  ...depthSpecs(site, option, frame, hands.hold),
+];

@@ -15,21 +15,11 @@ import { textWidth } from './lettering.ts';
 import { mainSpan, optionNote, optionTitle } from './optionWords.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
-import {
-  barredPiers,
-  depthHandle,
-  freeBar,
-  pierBays,
-  spanChanges,
-  spanFigures,
-  supportFeet,
-  supportHandles,
-  type InHand,
-} from './supportHandles.ts';
+import { barredPiers, freeBar, spanChanges, supportFeet, withChange, type InHand } from './supportHandles.ts';
 import { scaleBar } from './scaleBar.ts';
 import { sheet } from './sheet.ts';
 import type { StackRow, StackSheet } from './stackSheet.ts';
-import { chosenRow, rowNumber, stackOutset } from './stackSheet.ts';
+import { chosenRow, rowHandles, rowNumber, stackOutset } from './stackSheet.ts';
 
 function title(shared: StackSheet, option: AppraisedOption, y: number, room: number): Piece {
   const { input } = shared;
@@ -181,12 +171,8 @@ function arrange(
   const deckY = frame.y(option.profile.startLevelM);
   const narrowest = Math.min(...spans) * frame.pxPerM;
   const changes = spanChanges(option, hands?.hold ?? null);
-  const written = (span: number, i: number): string => {
-    const figure = length(span);
-    const whole = figure + (changes[i] ?? '');
-    if (textWidth(whole, letters.table) + 6 < span * frame.pxPerM) return whole;
-    return textWidth(figure, 11) + 3 < span * frame.pxPerM || span * frame.pxPerM > 26 ? figure : '';
-  };
+  const written = (span: number, i: number): string =>
+    withChange(length(span), changes[i] ?? '', span * frame.pxPerM);
   const figureY = isTall ? titleY : Math.min(Math.max(deckY + 10, titleY + 24), height - 42);
   const drawn = [
     title(shared, option, titleY, bodyPx),
@@ -239,15 +225,9 @@ function drawRow(
     hands !== undefined && supportFeet(site, option, frame, dimensionY, hands.locked),
     hands !== undefined && freeBar(site, option, frame, dimensionY + 8, hands.hold),
   ];
+  const rightPx = shared.isTall ? shared.sheetPx : bodyPx;
   const taken =
-    hands === undefined
-      ? []
-      : [
-          pierBays(site, option, frame),
-          spanFigures(option, frame, dimensionY - 8),
-          depthHandle(site, option, frame, hands.hold),
-          supportHandles(site, option, frame, hands),
-        ];
+    hands === undefined ? [] : rowHandles(shared, option, frame, dimensionY - 8, hands, { rightPx, height });
   const piece = chosenRow(shared, option, top, height, children, taken);
   return { piece, bottom: top + height, frame };
 }

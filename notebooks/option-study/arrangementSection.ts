@@ -20,6 +20,7 @@ import { anywayWords, droppedTable, droppedTotal } from './droppedTable.ts';
 import { handsOn } from './handsOn.ts';
 import { outTable } from './outTable.ts';
 import { studyDesk } from './studyDesk.ts';
+import { withKeyed } from './withKeyed.ts';
 import type { StudyCells } from './studyCells.ts';
 import { budgetOf } from './words.ts';
 
@@ -98,7 +99,9 @@ export function arrangementSection(
       }
       const { appraisal: of } = v.stacked;
       return [
-        inRoom(stack({ ...input, hands: v.hands }), room.widthPx + stackOutset, 'Elevations', 'with-bar'),
+        withKeyed(
+          inRoom(stack({ ...input, hands: v.hands }), room.widthPx + stackOutset, 'Elevations', 'with-bar'),
+        ),
         drawn.length < all.length && outOf(of, reference),
         droppedBy(of),
       ];

@@ -15,6 +15,7 @@ import { obstacleTable } from './brief/obstacleTable.ts';
 import { groundNames, oddsTable } from './brief/oddsTable.ts';
 import { waterTable } from './brief/waterTable.ts';
 import { studyDesk } from './studyDesk.ts';
+import { withKeyed } from './withKeyed.ts';
 import type { StudyCells } from './studyCells.ts';
 import { crossingWords } from './words.ts';
 
@@ -38,10 +39,6 @@ const presetNotes = ({ obstacles }: Brief): HtmlChild =>
 const handWords = ({ windows }: Site): string =>
   `Point at the drawing: piers, ${windows === undefined ? '' : 'abutments in their windows, '}soffit, edges of obstacles, headroom and road ends can be dragged, stepped with the arrow keys, or typed after Enter. Escape takes back; L locks a pier, Delete removes it, + in a span adds one.`;
 
-/** The same of a drawing at a small scale. */
-const smallHandWords =
-  'Point at the widest bracket: its ends can be dragged or stepped with the arrow keys, its width typed. Escape takes back.';
-
 /** Section 1: the brief in prose, drawing and tables, each figure changed where it stands. */
 export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
   const { brief, books, site, reference, asItStands, hands } = cells;
@@ -53,33 +50,33 @@ export function briefSection(page: Sheet, graph: Graph, store: StudyStore, cells
     owns: [site],
     wide: (v) => wantsWidth(v.site),
     body: (v, room) =>
-      inRoom(
-        crossing({
-          site: v.site,
-          option: v.reference,
-          obstacles: v.brief.obstacles,
-          ...sheetIn(v.site, room.widthPx, room.paperPx === null),
-          prefix: 'crossing',
-          ...(room.paperPx === null && { handles: v.hands }),
-        }),
-        room.widthPx,
-        'Crossing',
+      withKeyed(
+        inRoom(
+          crossing({
+            site: v.site,
+            option: v.reference,
+            obstacles: v.brief.obstacles,
+            ...sheetIn(v.site, room.widthPx, room.paperPx === null),
+            prefix: 'crossing',
+            ...(room.paperPx === null && { handles: v.hands }),
+          }),
+          room.widthPx,
+          'Crossing',
+        ),
       ),
     notes: (v, room) => {
       const { scale, widthPx } = sheetIn(v.site, room.widthPx, room.paperPx === null);
       const has = crossingHas(scale, widthPx);
       return [
         asItStandsNote(v.asItStands, v.books.currency),
-        room.paperPx === null &&
-          (has.handles || v.site.mainOpening !== null) &&
-          h('p', {}, has.handles ? handWords(v.site) : smallHandWords),
+        room.paperPx === null && h('p', {}, handWords(v.site)),
         has.band &&
           h(
             'p',
             {},
             'Last rows of the band: the lowest soffit that headroom, flood and freeboard allow, and what is spare.',
           ),
-        has.handles &&
+        has.lettering &&
           h('p', { class: 'source' }, 'Founding shown for the likeliest ground of each stretch.'),
       ];
     },

@@ -1,5 +1,5 @@
 import type { Page } from 'playwright-core';
-import { beforeAll, describe, expect, it } from 'vitest';
+import { afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { exampleOf, middleOf, oneStudyPage, openAsFile, settled } from './studyPage.ts';
 
 const study = oneStudyPage(exampleOf(['composite-i', 'concrete-box']));
@@ -28,6 +28,23 @@ async function pull(key: string, dx: number, dy: number, cell = CROSSING): Promi
   await page.mouse.move(x, y);
   await page.mouse.down();
   for (let step = 1; step <= 4; step += 1) await page.mouse.move(x + (dx * step) / 4, y + (dy * step) / 4);
+}
+
+/** Puts a finger on a handle and moves it, without lifting it; gives back what lifts it. */
+async function touchPull(key: string, to: number, cell = CROSSING): Promise<() => Promise<void>> {
+  const [x, y] = await middleOf(handle(key, cell).locator('.grip'));
+  const devTools = await page.context().newCDPSession(page);
+  const touch = (type: 'touchStart' | 'touchMove' | 'touchEnd', dx: number): Promise<unknown> =>
+    devTools.send('Input.dispatchTouchEvent', {
+      type,
+      touchPoints: type === 'touchEnd' ? [] : [{ x: x + dx, y: y + dx / 4 }],
+    });
+  await touch('touchStart', 0);
+  for (const part of [1, 2, 3]) await touch('touchMove', (to * part) / 3);
+  return async () => {
+    await touch('touchEnd', to);
+    await devTools.detach();
+  };
 }
 
 const changed = (key: string, from: number, cell = CROSSING): Promise<unknown> =>
@@ -62,6 +79,114 @@ describe.each([
     await settled(page);
     expect(await valueOf('pier/1', cell)).toBe(before);
     expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+  });
+});
+
+describe('at any width', () => {
+  let size: { width: number; height: number };
+  beforeAll(() => {
+    size = page.viewportSize()!;
+  });
+  afterEach(async () => {
+    await page.setViewportSize(size);
+    await settled(page);
+  });
+
+  /** Sets a width of the window, and waits until the drawing of a cell is drawn for it. */
+  async function atWidth(width: number, cell: string): Promise<void> {
+    await page.setViewportSize({ width, height: 900 });
+    await settled(page);
+    await page.locator(cell).evaluate((element) => element.scrollIntoView());
+    // A stack is drawn wider than its room by the bar of the reference.
+    await page.waitForFunction((place) => {
+      const drawing = document.querySelector(`${place} svg.drawing`);
+      const room = drawing?.closest('.body')?.getBoundingClientRect().width ?? NaN;
+      return Math.abs(Number(drawing?.getAttribute('width')) - room) <= 14;
+    }, cell);
+    await middleOf(handle('pier/1', cell).locator('.grip'));
+  }
+
+  it.each([
+    [1440, CROSSING],
+    [1440, STACK],
+    [800, CROSSING],
+    [800, STACK],
+    [400, CROSSING],
+    [400, STACK],
+  ])('at %i px every handle of %s is hit in its own target of 24 px or more', async (width, cell) => {
+    await atWidth(width, cell);
+    const found = await page.evaluate((place) => {
+      const wrong: string[] = [];
+      const keys: string[] = [];
+      for (const handle of document.querySelectorAll(`${place} [data-handle]`)) {
+        const key = handle.getAttribute('data-handle')!;
+        keys.push(key);
+        const grip = handle.querySelector('.grip')!;
+        grip.scrollIntoView({ block: 'center', inline: 'nearest' });
+        const { left, right, top, bottom } = grip.getBoundingClientRect();
+        if (Math.min(right - left, bottom - top) < 23.99) wrong.push(`${key} is small`);
+        if (left < 0 || right > innerWidth) wrong.push(`${key} is off the screen`);
+        for (const [x, y] of [
+          [(left + right) / 2, (top + bottom) / 2],
+          [left + 1, top + 1],
+          [right - 1, bottom - 1],
+        ] as const) {
+          const hit = document.elementFromPoint(x, y)?.closest('[data-handle]');
+          const other = hit?.getAttribute('data-handle') ?? 'nothing';
+          if (other !== key) wrong.push(`${other} is hit for ${key}`);
+        }
+      }
+      const { scrollWidth, clientWidth } = document.documentElement;
+      return { wrong, keys, over: scrollWidth - clientWidth };
+    }, cell);
+    expect(found.wrong).toEqual([]);
+    expect(found.over).toBe(0);
+    for (const key of ['span/0', 'pier/1', 'depth']) expect(found.keys).toContain(key);
+    if (cell === CROSSING)
+      for (const key of ['obstacle/0/to', 'clearance/0', 'road/start', 'road/end'])
+        expect(found.keys).toContain(key);
+  });
+
+  it('at 800 px a pier dragged in its row changes its span, in one step of undo', async () => {
+    await atWidth(800, STACK);
+    const [pier, span] = [await valueOf('pier/1', STACK), await valueOf('span/0', STACK)];
+    await pull('pier/1', 12, 0, STACK);
+    await changed('pier/1', pier, STACK);
+    await page.waitForSelector(`${STACK} .free path`);
+    await page.mouse.up();
+    await settled(page);
+    const moved = (await valueOf('pier/1', STACK)) - pier;
+    expect(moved).toBeGreaterThan(3);
+    expect((await valueOf('span/0', STACK)) - span).toBeCloseTo(moved, 6);
+    await undoIs('Undo moving a pier');
+    await page.getByRole('button', { name: 'Undo', exact: true }).click();
+    await settled(page);
+    expect(await valueOf('pier/1', STACK)).toBe(pier);
+    expect(await page.getByRole('button', { name: 'Undo', exact: true }).isDisabled()).toBe(true);
+  });
+
+  it('at 400 px spans are typed in their row', async () => {
+    await atWidth(400, STACK);
+    const spans = [await valueOf('span/0', STACK), await valueOf('span/1', STACK)] as const;
+    await handle('span/0', STACK).locator('.grip').click();
+    await page.keyboard.type(String(spans[0] + 2));
+    await page.keyboard.press('Enter');
+    await changed('span/0', spans[0], STACK);
+    await settled(page);
+    expect(await valueOf('span/0', STACK)).toBe(spans[0] + 2);
+    expect(await valueOf('span/1', STACK)).toBeCloseTo(spans[1] - 2, 6);
+    await undoIs('Undo span');
+  });
+
+  it('at 400 px a finger drags a pier in its row', async () => {
+    await atWidth(400, STACK);
+    const before = await valueOf('pier/1', STACK);
+    const lift = await touchPull('pier/1', 9, STACK);
+    await changed('pier/1', before, STACK);
+    await lift();
+    await settled(page);
+    expect(await valueOf('pier/1', STACK)).toBeGreaterThan(before + 3);
+    await undoIs('Undo moving a pier');
   });
 });
 
@@ -213,21 +338,11 @@ describe('by hand', () => {
         .first()
         .evaluate((element) => getComputedStyle(element).touchAction),
     ).toBe('auto');
-    const box = (await grip.boundingBox())!;
-    const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
     const scrolled = await page.evaluate(() => window.scrollY);
-    const devTools = await page.context().newCDPSession(page);
-    const touch = (type: 'touchStart' | 'touchMove' | 'touchEnd', dx: number): Promise<unknown> =>
-      devTools.send('Input.dispatchTouchEvent', {
-        type,
-        touchPoints: type === 'touchEnd' ? [] : [{ x: x + dx, y: y + dx / 4 }],
-      });
-    await touch('touchStart', 0);
-    for (const dx of [8, 16, 24]) await touch('touchMove', dx);
+    const lift = await touchPull('pier/1', 24);
     await changed('pier/1', before);
-    await touch('touchEnd', 24);
+    await lift();
     await settled(page);
-    await devTools.detach();
     expect(await valueOf('pier/1')).toBeGreaterThan(before + 3);
     expect(await page.evaluate(() => window.scrollY)).toBe(scrolled);
     await undoIs('Undo moving a pier');

@@ -125,7 +125,7 @@ describe('crossing(input)', () => {
     expect(piece.attrs['role']).toBe('group');
   });
 
-  it('at a small scale says over everything what is barred, and gives the main opening edges and a width', () => {
+  it('at a small scale says over everything what is barred, and takes the main opening by its bracket, and has every handle of a large drawing', () => {
     const small = (handles: boolean): Piece =>
       crossing({
         site,
@@ -151,8 +151,20 @@ describe('crossing(input)', () => {
     for (const { attrs } of words) expect(Number(attrs['y'])).toBeGreaterThan(16 + 11);
 
     const held = [...elements(small(true))].filter(({ attrs }) => attrs['data-handle'] !== undefined);
+    const keysOf = (pieces: readonly Piece[]): string[] =>
+      pieces.map(({ attrs }) => attrs['data-handle'] ?? '').sort();
+    const large = crossing({
+      site,
+      option: second,
+      obstacles,
+      widthPx: 980,
+      handles: { hold: null, locked: [] },
+    });
+    const inLarge = [...elements(large)].filter(({ attrs }) => attrs['data-handle'] !== undefined);
+    expect(keysOf(held)).toEqual([...keysOf(inLarge), 'width/1'].sort());
+    const opening = held.filter(({ attrs }) => /^width|obstacle\/1/u.test(attrs['data-handle']!));
     expect(
-      held.map(({ attrs }) => [
+      opening.map(({ attrs }) => [
         attrs['data-handle'],
         attrs['role'],
         attrs['aria-valuenow'],
