@@ -3,9 +3,9 @@ import { beamTrack, deflectionInfluence } from '../../mechanics/index.ts';
 import type { Check, SupportReaction } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
 import { middleStation } from '../common/middleStation.ts';
+import type { SkewTorques } from '../common/skewTorque.ts';
 import { bearingChecks, skewTurnings } from './boxBearings.ts';
 import { boxData } from './boxData.ts';
-import { boxSkew } from './boxSkew.ts';
 import { boxService } from './boxService.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { BoxTraffic } from './boxTraffic.ts';
@@ -15,8 +15,16 @@ import type { BendingUse } from './ultimateBending.ts';
 import { underSlabChecks } from './underSlab.ts';
 import type { SizedBox } from './sizeBox.ts';
 
-/** All limit states of a sized box, of its top slab and of its bearings; labels as they are printed. */
-export function boxChecks(model: BoxModel, box: SizedBox, reactions: readonly SupportReaction[]): Check[] {
+/**
+ * All limit states of a sized box, of its top slab and of its bearings; labels as they are printed.
+ * @param skew torques of skew ends by span
+ */
+export function boxChecks(
+  model: BoxModel,
+  box: SizedBox,
+  reactions: readonly SupportReaction[],
+  skew: SkewTorques,
+): Check[] {
   const { tendons, compressions, webs } = box;
   const continuous = model.task.spansM.length > 1;
   const worst = (pick: (e: number) => number): number => {
@@ -79,7 +87,7 @@ export function boxChecks(model: BoxModel, box: SizedBox, reactions: readonly Su
         depthM: reactions.map(() => model.task.depthM),
         bottomWidthM: reactions.map(() => box.sections.span.bottomWidthM),
         onTwo: reactions.map(() => true),
-        skew: skewTurnings(boxSkew(model, box), model.task.spansM, model.traffic.load.udlKNm),
+        skew: skewTurnings(skew, model.task.spansM, model.traffic.load.udlKNm),
       },
       reactions,
     ),

@@ -1,12 +1,13 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { skewFigures } from '../common/skewEnds.ts';
+import type { SkewTorques } from '../common/skewTorque.ts';
 import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
 import { bearingsApart } from './boxBearings.ts';
 import { madeFigures } from './boxConcrete.ts';
 import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
-import { boxSkew, boxSkewKNm } from './boxSkew.ts';
+import { boxSkewKNm } from './boxSkew.ts';
 import { betweenZeros, workingWidthM } from './shearLag.ts';
 import type { SizedBox } from './sizeBox.ts';
 import type { Struts } from './struts.ts';
@@ -50,8 +51,11 @@ export function ownWeightShare(model: BoxModel, box: SizedBox): number {
   return Math.min(1, Math.max(0, share));
 }
 
-/** Named figures of section, statics and tendons. */
-export function boxFigures(model: BoxModel, box: SizedBox): Record<string, number> {
+/**
+ * Named figures of section, statics and tendons.
+ * @param skew torques of skew ends by span
+ */
+export function boxFigures(model: BoxModel, box: SizedBox, skew: SkewTorques): Record<string, number> {
   const { layout, beam, task, traffic, lengthM } = model;
   const { sections, tendons, own, thicknesses } = box;
   const areaM2 = lengthM * task.deck.widthM;
@@ -84,7 +88,7 @@ export function boxFigures(model: BoxModel, box: SizedBox): Record<string, numbe
     pierInertiaM4: sections.pier.inertiaM4,
     enclosedAreaM2: box.shear.enclosedM2,
     bearingsApartM: apartM,
-    ...skewFigures(boxSkewKNm(model, boxSkew(model, box)), apartM),
+    ...skewFigures(boxSkewKNm(model, skew), apartM),
     webTrafficShare: box.shear.webShare,
     tendonCount: tendons.group.tendonsPerWeb * layout.webs,
     strandsPerTendon: tendons.group.strandsPerTendon,

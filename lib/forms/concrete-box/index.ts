@@ -13,6 +13,7 @@ import { boxElevation, boxSections } from './boxDrawing.ts';
 import { boxFigures, boxReactions, ownWeightShare } from './boxReport.ts';
 import { boxLines } from './boxLines.ts';
 import { boxModel } from './boxModel.ts';
+import { boxSkew } from './boxSkew.ts';
 import { boxFaults, refuse } from './boxFaults.ts';
 import { boxChoices, wideBoxVariants } from './boxVariants.ts';
 import { heightUnder } from './heightUnder.ts';
@@ -48,7 +49,8 @@ function size(task: UnitTask): Design {
   const model = boxModel(task);
   const box = sizeBox(model);
   const reactions = boxReactions(model, box);
-  const checks = boxChecks(model, box, reactions);
+  const skew = boxSkew(model, box);
+  const checks = boxChecks(model, box, reactions, skew);
   const warnings = overLimit(checks, 'tendons and concrete');
   warnings.push(
     ...curveWarning(
@@ -74,6 +76,6 @@ function size(task: UnitTask): Design {
     lines: boxLines(model, box),
     heaviestPiece: null,
     warnings,
-    figures: boxFigures(model, box),
+    figures: boxFigures(model, box, skew),
   };
 }
