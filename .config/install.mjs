@@ -2,6 +2,7 @@
 import { createHash } from 'node:crypto';
 import { spawn, spawnSync } from 'node:child_process';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { setPriority } from 'node:os';
 import { resolve } from 'node:path';
 
 export const root = resolve(import.meta.dirname, '..');
@@ -13,13 +14,19 @@ export function run(command, args, env = {}) {
   if (result.status !== 0) process.exit(result.status ?? 1);
 }
 
+/** Lets a process just begun, and all it begins, leave the processor to others: 0 not at all, 19 always. */
+export function giveWay(child, givesWay) {
+  if (givesWay > 0 && child.pid !== undefined) setPriority(child.pid, givesWay);
+}
+
 /** Runs commands beside each other; ends the process with the code of the first that fails, once all have ended. */
-export async function runTogether(commands) {
+export async function runTogether(commands, givesWay = 0) {
   const codes = await Promise.all(
     commands.map(
       ([command, ...args]) =>
         new Promise((ended) => {
           const child = spawn(command, args, { cwd: root, stdio: 'inherit' });
+          giveWay(child, givesWay);
           child.on('error', ({ message }) => fail(`${command} could not be started: ${message}`));
           child.on('close', (code) => ended(code ?? 1));
         }),

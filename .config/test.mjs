@@ -2,15 +2,21 @@
 import { spawn } from 'node:child_process';
 import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
 import { resolve } from 'node:path';
-import { fail, install, root, runTogether } from './install.mjs';
+import { fail, giveWay, install, root, runTogether } from './install.mjs';
 
 install();
 const started = performance.now();
 const { findChromium } = await import('./chromium.mjs');
 const chromium = await findChromium();
 
+/**
+ * How readily unit tests and checks leave a processor to the others, 0 not at all, 19 always: browser tests come one after another and
+ * decide how long the whole takes, and a page kept waiting is not the page a user has.
+ */
+const GIVES_WAY = 10;
+
 /** Runs the tests of one project; what it says is held back until it has ended, so that two do not talk at once. */
-function runProject(project) {
+function runProject(project, givesWay = 0) {
   const file = resolve(root, `.cache/${project}.json`);
   // What an earlier run has left must not speak for this one.
   rmSync(file, { force: true });
@@ -21,6 +27,7 @@ function runProject(project) {
       cwd: root,
       env: { ...process.env, CHROMIUM: chromium, TZ: 'UTC' },
     });
+    giveWay(child, givesWay);
     const said = [];
     child.stdout.on('data', (data) => said.push(data));
     child.stderr.on('data', (data) => said.push(data));
@@ -39,11 +46,14 @@ function runProject(project) {
 mkdirSync(resolve(root, '.cache'), { recursive: true });
 process.stdout.write('Unit tests, and beside them types, lint, build and browser tests ...\n');
 // Unit tests need nothing of the others; browser tests need what is built, and take longest in a row.
-const unit = runProject('unit');
-const checked = runTogether([
-  ['npm', 'run', '--silent', 'types'],
-  ['npm', 'run', '--silent', 'lint'],
-]);
+const unit = runProject('unit', GIVES_WAY);
+const checked = runTogether(
+  [
+    ['npm', 'run', '--silent', 'types'],
+    ['npm', 'run', '--silent', 'lint'],
+  ],
+  GIVES_WAY,
+);
 await runTogether([['npx', 'vite', 'build', '--logLevel', 'warn']]);
 const outcomes = await Promise.all([unit, runProject('browser')]);
 await checked;

@@ -6,21 +6,28 @@ import { openSite, type Heard, type Site } from './site.ts';
 /** A cell says only after 150 ms that it waits: what is seen before that may be of the study before. */
 const SAYS_SO_MS = 250;
 
-/** Waits until the stack stands and nothing is being worked out: cells are done, or held where an entry is refused. */
+/**
+ * Waits until the stack stands and nothing is being worked out: cells are done, or held where an entry is refused. The
+ * page's own clock is waited for, which on a busy machine runs behind that of the test, and then what it draws next.
+ */
 export async function settled(page: Page): Promise<void> {
   await page.waitForSelector('[data-option]', { timeout: 60_000 });
-  await page.waitForTimeout(SAYS_SO_MS);
-  await page.waitForFunction(
-    // Once all has been drawn, what is off the screen is not laid out any more.
-    () =>
-      document.querySelector('.skips') !== null &&
-      [...document.querySelectorAll('.cell')].every((cell) =>
-        ['done', 'held'].includes(cell.getAttribute('data-state')!),
-      ),
-    undefined,
-    { timeout: 60_000, polling: 100 },
-  );
+  await page.evaluate((ms) => new Promise((resolve) => setTimeout(resolve, ms)), SAYS_SO_MS);
+  do {
+    await page.waitForFunction(allStand, undefined, { timeout: 60_000, polling: 100 });
+    await page.evaluate(
+      () => new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve))),
+    );
+  } while (!(await page.evaluate(allStand)));
 }
+
+/** Whether every cell of the page is done or held, run in the page. */
+const allStand = (): boolean =>
+  // Once all has been drawn, what is off the screen is not laid out any more.
+  document.querySelector('.skips') !== null &&
+  [...document.querySelectorAll('.cell')].every((cell) =>
+    ['done', 'held'].includes(cell.getAttribute('data-state')!),
+  );
 
 /** From one look at a place to the next, ms. */
 const LOOK_MS = 100;
