@@ -6,9 +6,10 @@ import { fewestStrands, leastForce, type Drape, type DrapeAsked } from './leastF
 import type { LaunchedDeck } from './launchedDeck.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { serviceNeed } from './serviceNeed.ts';
+import { drapeNeed } from './stationNeed.ts';
 import { straightStress, tendonStress, type TendonStress } from './tendonForce.ts';
 import { tendonGroup, type TendonGroup } from './tendonGroup.ts';
-import { tendonLine } from './tendonLine.ts';
+import { tendonLines } from './tendonLine.ts';
 import { ultimateBending, type BendingUse } from './ultimateBending.ts';
 import { ultimateNeed } from './ultimateNeed.ts';
 
@@ -90,21 +91,18 @@ export function findTendons(
   const straightM2 = straightStrands * model.strandM2;
   const tried = model.tendonShapes.flatMap((shapes, way) => {
     if (before && way !== before.way) return [];
-    const line = tendonLine(model, sections, group, shapes);
+    const lines = tendonLines(model, sections, group, shapes);
     const ultimate = ultimateNeed(model, sections, own, stress.lastingMPa, straightM2, steadiedKN, shapes);
     const asked: DrapeAsked = {
-      need(drape, enough) {
-        const at = line(drape);
-        const forService = service(at, enough);
-        return forService >= enough ? forService : Math.max(forService, ultimate(at, enough));
-      },
-      bears: (drape, forceKN) => fresh(line(drape), strandsFor(forceKN) * webs * initialKN) <= youngMPa,
+      need: drapeNeed(lines, [service, ultimate]),
+      bears: (drape, forceKN) =>
+        fresh(lines.along(drape), strandsFor(forceKN) * webs * initialKN) <= youngMPa,
     };
     const found = leastForce(asked, spansM.length, before?.drape ?? null);
-    return [{ ...found, way, meanShare: shapes.meanShare, line }];
+    return [{ ...found, way, meanShare: shapes.meanShare, lines }];
   });
   const found = fewestStrands(tried);
-  const { depthM, eccentricityM, parasiticM, share } = found.line(found.drape);
+  const { depthM, eccentricityM, parasiticM, share } = found.lines.along(found.drape);
 
   const bend = (strands: number): [BendingUse, BendingUse] =>
     ultimateBending(model, sections, own, {

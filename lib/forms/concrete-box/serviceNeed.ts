@@ -5,8 +5,8 @@ import type { BoxModel } from './boxModel.ts';
 import type { CastOf } from './freshTension.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { serviceLimits } from './serviceLimits.ts';
+import type { StationNeed } from './stationNeed.ts';
 import type { TendonGroup } from './tendonGroup.ts';
-import type { TendonLine } from './tendonLine.ts';
 
 /** Of the effects of a load service asks for the moments. */
 type Moments = Pick<Effects, 'momentKNm'>;
@@ -27,10 +27,7 @@ export type ServiceSections = Pick<
   readonly span: { readonly inertiaM4: number };
 };
 
-/** Draped force that a limit asks for along a line of the tendons, kN; one that is `enough` or more may be said as soon as that is known. */
-export type LineNeed = (line: TendonLine, enough?: number) => number;
-
-/** Draped force of the heaviest span after all losses that service asks for along a given line of the tendons, kN; Infinity where none will do. */
+/** Draped force of the heaviest span after all losses that service asks for at a station, kN; Infinity where none will do. */
 export function serviceNeed(
   model: ServiceModel,
   sections: ServiceSections,
@@ -38,7 +35,7 @@ export function serviceNeed(
   group: Pick<TendonGroup, 'heightM'>,
   straightKN: number,
   gradient: Omit<typeof boxData.gradient, 'source'> = boxData.gradient,
-): LineNeed {
+): StationNeed {
   const { service } = model.traffic;
   const spread = boxData.prestressSpread[model.standardId];
   // Stiffness times free curvature of the gradient with traffic.
@@ -61,40 +58,30 @@ export function serviceNeed(
       service.momentMinKNm[i]! +
       Math.min(arched * gradient.topWarmerK, -arched * gradient.topCoolerK);
   }
-  // The station that ruled a line out is asked first about the next: its neighbours are ruled out by the same one.
-  let first = 0;
-  return ({ eccentricityM, parasiticM, share }, enough = Infinity) => {
+  const straight = limits.map(({ tensionKPa }) =>
+    sections.areaM2.map((area) => (spread * straightKN) / area + tensionKPa),
+  );
+  const { areaM2, inertiaM4, topM, lowM, topLag, lowLag } = sections;
+  return (i, { eccentricityM, parasiticM, share }) => {
+    const inertia = inertiaM4[i]!;
+    const bend = share * eccentricityM - parasiticM;
+    const axial = share / areaM2[i]!;
     let most = 0;
-    for (let k = -1; k < n; k++) {
-      const i = k < 0 ? first : k;
-      const area = sections.areaM2[i]!;
-      const inertia = sections.inertiaM4[i]!;
-      const e = eccentricityM[i]!;
-      const bend = share[i]! * e - parasiticM[i]!;
-      const axial = share[i]! / area;
-      for (const { aroundM, tensionKPa } of limits) {
-        const straight = (spread * straightKN) / area + tensionKPa;
-        const down = (sections.lowLag[i]! * Math.min(sections.lowM[i]!, e + aroundM)) / inertia;
-        const up = (sections.topLag[i]! * Math.min(sections.topM[i]!, aroundM - e)) / inertia;
-        const lowNeed = (sagging[i]! * down - straight) / (spread * (axial + bend * down));
-        const highNeed = (-hogging[i]! * up - straight) / (spread * (axial - bend * up));
-        most = Math.max(
-          most,
-          forceFor(lowNeed, sagging[i]! * down > straight),
-          forceFor(highNeed, -hogging[i]! * up > straight),
-        );
-      }
-      if (most >= enough) {
-        first = i;
-        return most;
-      }
+    for (let k = 0; k < limits.length; k++) {
+      const { aroundM } = limits[k]!;
+      const borne = straight[k]![i]!;
+      const down = (lowLag[i]! * Math.min(lowM[i]!, eccentricityM + aroundM)) / inertia;
+      const up = (topLag[i]! * Math.min(topM[i]!, aroundM - eccentricityM)) / inertia;
+      const pulledLow = sagging[i]! * down - borne;
+      const pulledTop = -hogging[i]! * up - borne;
+      if (pulledLow > 0) most = Math.max(most, forceFor(pulledLow, spread * (axial + bend * down)));
+      if (pulledTop > 0) most = Math.max(most, forceFor(pulledTop, spread * (axial - bend * up)));
     }
     return most;
   };
 }
 
-/** A negative force for a fibre in tension means that the tendons make it worse. */
-function forceFor(need: number, inTension: boolean): number {
-  if (!inTension) return 0;
-  return need > 0 ? need : Infinity;
+/** Force that presses a fibre by as much as it is pulled, kN; where tendons make it worse none will do. */
+function forceFor(pulledKPa: number, pressedPerKN: number): number {
+  return pressedPerKN > 0 ? pulledKPa / pressedPerKN : Infinity;
 }

@@ -18,16 +18,25 @@ export interface TendonLine {
   readonly share: Float64Array;
 }
 
-/**
- * Tendon level and parasitic moment for any drape: both are sums of the same shapes. The arrays are used again by the
- * next call.
- */
-export function tendonLine(
+/** Draped tendons for any drape: level and parasitic moment are sums of the same shapes. */
+export interface TendonLines {
+  /** Strands as a share of those in the heaviest span, at the stations. */
+  readonly share: Float64Array;
+  /** At one station: below the top of the slab, m, below the centroid, m, and parasitic moment of unit force, m. */
+  readonly depthM: (drape: Drape, i: number) => number;
+  readonly eccentricityM: (drape: Drape, i: number) => number;
+  readonly parasiticM: (drape: Drape, i: number) => number;
+  /** At all stations. The arrays are used again by the next call. */
+  readonly along: (drape: Drape) => TendonLine;
+}
+
+/** The lines that tendons of one way of sharing strands out can take along a deck. */
+export function tendonLines(
   model: Pick<BoxModel, 'beam'> & { readonly stiffness?: Float64Array },
   sections: Pick<SectionsAlong, 'topM'> & { readonly span: Pick<BoxSection, 'topM' | 'lowM'> },
   group: Pick<TendonGroup, 'fromFaceM'>,
   { shapes, parasitic, share }: TendonShapes,
-): (drape: Drape) => TendonLine {
+): TendonLines {
   const { topM, lowM } = sections.span;
   const low = Math.max(0, lowM - group.fromFaceM);
   const high = -Math.max(0, topM - group.fromFaceM);
@@ -37,20 +46,37 @@ export function tendonLine(
     model.beam,
     shift.map((value, i) => (-share[i]! * value) / (model.stiffness?.[i] ?? 1)),
   ).momentKNm;
+  const [endLow, innerLow, pierHigh] = shapes;
+  const [ofEnd, ofInner, ofPier] = parasitic;
   const n = shift.length;
-  const depthM = new Float64Array(n);
-  const eccentricityM = new Float64Array(n);
-  const parasiticM = new Float64Array(n);
-  return ([end, inner, pier]) => {
-    const a = end * low;
-    const b = inner * low;
-    const c = pier * high;
-    for (let i = 0; i < n; i++) {
-      const e = a * shapes[0][i]! + b * shapes[1][i]! + c * shapes[2][i]!;
-      depthM[i] = topM + e;
-      eccentricityM[i] = e + shift[i]!;
-      parasiticM[i] = a * parasitic[0][i]! + b * parasitic[1][i]! + c * parasitic[2][i]! + shiftParasitic[i]!;
-    }
-    return { depthM, eccentricityM, parasiticM, share };
+  const line = {
+    depthM: new Float64Array(n),
+    eccentricityM: new Float64Array(n),
+    parasiticM: new Float64Array(n),
+    share,
+  };
+  /** Below the centroid of the section in the span, m. */
+  const levelM = (drape: Drape, i: number): number =>
+    drape[0] * low * endLow[i]! + drape[1] * low * innerLow[i]! + drape[2] * high * pierHigh[i]!;
+  const depthM = (drape: Drape, i: number): number => topM + levelM(drape, i);
+  const eccentricityM = (drape: Drape, i: number): number => levelM(drape, i) + shift[i]!;
+  const parasiticM = (drape: Drape, i: number): number =>
+    drape[0] * low * ofEnd[i]! +
+    drape[1] * low * ofInner[i]! +
+    drape[2] * high * ofPier[i]! +
+    shiftParasitic[i]!;
+  return {
+    share,
+    depthM,
+    eccentricityM,
+    parasiticM,
+    along(drape) {
+      for (let i = 0; i < n; i++) {
+        line.depthM[i] = depthM(drape, i);
+        line.eccentricityM[i] = eccentricityM(drape, i);
+        line.parasiticM[i] = parasiticM(drape, i);
+      }
+      return line;
+    },
   };
 }

@@ -5,13 +5,13 @@ import type { OwnWeight } from './boxLoads.ts';
 import type { BoxModel } from './boxModel.ts';
 import type { SectionsAlong } from './sectionsAlong.ts';
 import { betweenZeros, workingWidthM } from './shearLag.ts';
-import type { LineNeed } from './serviceNeed.ts';
+import type { StationNeed } from './stationNeed.ts';
 import type { TendonShapes } from './tendonShape.ts';
 import { ultimateMoments } from './ultimateMoments.ts';
 
 /**
- * Draped force of the heaviest span after all losses that ultimate bending asks for along a given line of the tendons, kN, with the
- * compression zone of the force of the pass before. Infinity where more force makes it worse.
+ * Draped force of the heaviest span after all losses that ultimate bending asks for at a station, kN, with the compression zone of
+ * the force of the pass before. Infinity where more force makes it worse.
  */
 export function ultimateNeed(
   model: BoxModel,
@@ -21,7 +21,7 @@ export function ultimateNeed(
   straightM2: number,
   beforeKN: number,
   { share }: TendonShapes,
-): LineNeed {
+): StationNeed {
   const { task, layout, standard } = model;
   const { down, up } = ultimateMoments(model, own);
   const grown = strandDesignMPa(model) / lastingMPa;
@@ -52,18 +52,16 @@ export function ultimateNeed(
     });
   }
   const prestress = standard.factors.uls.prestress;
-  return ({ depthM, parasiticM }, enough = Infinity) => {
-    let most = 0;
-    for (let i = 0; i < n; i++) {
-      const m = prestress * parasiticM[i]!;
-      const strength = grown * share[i]!;
-      const sag = down[i]! - fixed[0][i]!;
-      if (sag > 0) most = Math.max(most, over(sag, strength * (depthM[i]! - block[0][i]!) - m));
-      const hog = up[i]! - fixed[1][i]!;
-      if (hog > 0) most = Math.max(most, over(hog, strength * (task.depthM - depthM[i]! - block[1][i]!) + m));
-      if (most >= enough) break;
-    }
-    return most;
+  const [fixedSag, fixedHog] = fixed;
+  const [blockSag, blockHog] = block;
+  return (i, { depthM, parasiticM, share: shared }) => {
+    const m = prestress * parasiticM;
+    const strength = grown * shared;
+    const sag = down[i]! - fixedSag[i]!;
+    const forSag = sag > 0 ? over(sag, strength * (depthM - blockSag[i]!) - m) : 0;
+    const hog = up[i]! - fixedHog[i]!;
+    const forHog = hog > 0 ? over(hog, strength * (task.depthM - depthM - blockHog[i]!) + m) : 0;
+    return Math.max(forSag, forHog);
   };
 }
 

@@ -3,8 +3,9 @@ import { freshTension, youngTensionMPa } from '../concrete-box/freshTension.ts';
 import { fewestStrands, leastForce, type Drape } from '../concrete-box/leastForce.ts';
 import { boxData } from '../concrete-box/boxData.ts';
 import { serviceNeed, type ServiceSections } from '../concrete-box/serviceNeed.ts';
+import { drapeNeed } from '../concrete-box/stationNeed.ts';
 import { tendonStress, type TendonStress } from '../concrete-box/tendonForce.ts';
-import { tendonLine, type TendonLine } from '../concrete-box/tendonLine.ts';
+import { tendonLines, type TendonLine } from '../concrete-box/tendonLine.ts';
 import { tendonShapes } from '../concrete-box/tendonShape.ts';
 import { sharePowers } from '../concrete-box/tendonShare.ts';
 import { slabDeckData } from './slabDeckData.ts';
@@ -77,14 +78,14 @@ export function findSlabTendons(model: SlabModel, atLeast = 0): SlabTendons {
       return Math.min(mostStrands, Math.max(count * boxData.tendons.sizes[0]!.strands, atLeast, wanted));
     };
     const tried = shapes.map((shape) => {
-      const line = tendonLine(model, sections, { fromFaceM }, shape);
+      const lines = tendonLines(model, sections, { fromFaceM }, shape);
       const asked = {
-        need: (drape: Drape, enough: number) => need(line(drape), enough),
+        need: drapeNeed(lines, [need]),
         bears: (drape: Drape, forceKN: number) =>
-          fresh(line(drape), strandsFor(forceKN) * strandM2 * stress.initialMPa * 1e3) <= youngMPa,
+          fresh(lines.along(drape), strandsFor(forceKN) * strandM2 * stress.initialMPa * 1e3) <= youngMPa,
       };
       const found = leastForce(asked, spansM.length, null);
-      return { ...found, line, meanShare: shape.meanShare };
+      return { ...found, lines, meanShare: shape.meanShare };
     });
     const found = fewestStrands(tried);
     const next = strandsFor(found.forceKN);
@@ -94,7 +95,7 @@ export function findSlabTendons(model: SlabModel, atLeast = 0): SlabTendons {
       continue;
     }
     return {
-      ...found.line(found.drape),
+      ...found.lines.along(found.drape),
       count: layer(model, next).count,
       strands: next,
       mostStrands,

@@ -4,6 +4,7 @@ import { bendingCapacity } from '../../../lib/forms/concrete-box/bendingCapacity
 import { boxModel } from '../../../lib/forms/concrete-box/boxModel.ts';
 import { fewestStrands, leastForce, type Drape } from '../../../lib/forms/concrete-box/leastForce.ts';
 import { serviceNeed } from '../../../lib/forms/concrete-box/serviceNeed.ts';
+import { drapeNeed, type StationNeed } from '../../../lib/forms/concrete-box/stationNeed.ts';
 import { tendonStress } from '../../../lib/forms/concrete-box/tendonForce.ts';
 import { tendonGroup } from '../../../lib/forms/concrete-box/tendonGroup.ts';
 import { sharePowers, tendonShare } from '../../../lib/forms/concrete-box/tendonShare.ts';
@@ -185,12 +186,7 @@ describe('serviceNeed()', () => {
       { effects: { momentKNm: moments(momentKNm) } },
       { heightM: 0.1 },
       0,
-    )({
-      depthM: moments(0.5 + eccentricityM),
-      eccentricityM: moments(eccentricityM),
-      parasiticM: moments(0),
-      share: moments(1),
-    });
+    )(0, { depthM: 0.5 + eccentricityM, eccentricityM, parasiticM: 0, share: 1 });
 
   it('keeps the faces uncracked where tendons lie in the middle: (M / W - fctm) A, by hand', () => {
     // W = 1/3 m3: 2000 kNm give 6 MPa at the face; fctm of C50 is 4.07 MPa: 1.93 MPa over 2 m2 at 0.9.
@@ -203,6 +199,53 @@ describe('serviceNeed()', () => {
   it('judges low tendons by the concrete round them', () => {
     // e = 0.35: 150 mm below is the face: M / W = P (1 / A + e / W), 6000 = 0.9 P (0.5 + 1.05).
     expect(needAt(0.35, 2000)).toBeCloseTo(6000 / 0.9 / 1.55, 6);
+  });
+});
+
+describe('drapeNeed()', () => {
+  // Three shapes that are 1 at a station of their own, and limits that ask for a moment over an arm.
+  const unit = (at: number) => Float64Array.from({ length: 5 }, (_, i) => (i === at ? 1 : 0.1 * i));
+  const [end, inner, pier] = [unit(1), unit(2), unit(4)];
+  const eccentricityM = ([a, b, c]: Drape, i: number) => a * end[i]! + b * inner[i]! - c * pier[i]!;
+  const lines = {
+    share: new Float64Array(5).fill(1),
+    depthM: (drape: Drape, i: number) => 1 + eccentricityM(drape, i),
+    eccentricityM,
+    parasiticM: (_: Drape, i: number) => 0.01 * i,
+    along: () => expect.fail('the whole line is not asked for'),
+  };
+  const over = (moment: number, armM: number): number => (armM > 0 ? moment / armM : Infinity);
+  const needs: readonly StationNeed[] = [
+    (i, at) => over(1 + i, 0.4 + at.eccentricityM - at.parasiticM),
+    (i, at) => over(3 - 0.5 * i, 1.7 - at.depthM),
+  ];
+  const whole = (drape: Drape): number =>
+    Math.max(
+      ...needs.flatMap((need) =>
+        [0, 1, 2, 3, 4].map((i) =>
+          need(i, {
+            depthM: lines.depthM(drape, i),
+            eccentricityM: lines.eccentricityM(drape, i),
+            parasiticM: lines.parasiticM(drape, i),
+            share: 1,
+          }),
+        ),
+      ),
+    );
+
+  it('is the most of all limits at all stations, and rules out what needs enough or more, whatever was asked before', () => {
+    const need = drapeNeed(lines, needs);
+    const shares = [0, 0.3, 0.7, 1];
+    const drapes = shares.flatMap((a) => shares.flatMap((b) => shares.map((c) => [a, b, c] as const)));
+    for (const enough of [Infinity, 9, 6, 4]) {
+      for (const drape of drapes) {
+        const [said, is] = [need(drape, enough), whole(drape)];
+        if (is < enough) expect(said).toBe(is);
+        else expect(said).toBeGreaterThanOrEqual(enough);
+      }
+    }
+    // The limits asked for do tell drapes apart.
+    expect(new Set(drapes.map((drape) => whole(drape) < 9)).size).toBe(2);
   });
 });
 
