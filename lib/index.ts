@@ -44,6 +44,7 @@ export { depthBand, endRatioWindow, fact, printed, source, spanWindow, type Sour
 export {
   CROSSFALL,
   abutmentWindows,
+  bearingLevel,
   constructionDepth,
   groundAt,
   roadLevelAt,

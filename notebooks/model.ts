@@ -3,12 +3,14 @@ export type * from '../lib/index.ts';
 export {
   PIER_HALF_WIDTH_M,
   abutmentWindows,
+  bearingLevel,
   billParts,
   constructionDepth,
   depthMissed,
   families,
   familyOf,
   formIds,
+  groundAt,
   roadLevelAt,
   siteOf,
 } from '../lib/index.ts';

@@ -94,6 +94,8 @@ export interface PierShaft {
 export interface Foundation {
   readonly ground: string;
   readonly odds: number;
+  /** Level of the bearing stratum under the support, m. */
+  readonly bearingLevelM: number;
   readonly kind: 'spread' | 'bored-piles';
   readonly footing: {
     readonly lengthM: number;

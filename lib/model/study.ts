@@ -204,10 +204,13 @@ export interface GroundStretch {
   readonly classes: readonly GroundOdds[];
 }
 
+/** A class that ground may turn out to be. Where it bears (rock head, dense gravel, stiff clay) is said in one of two ways. */
 export interface GroundOdds {
   readonly ground: GroundClassId;
-  /** Level of the bearing stratum (rock head, dense gravel, stiff clay), m. */
-  readonly bearingLevelM: number;
+  /** Level of the bearing stratum, m, all along the stretch. */
+  readonly bearingLevelM?: number | undefined;
+  /** Depth of the bearing stratum below the ground, m, which it follows. */
+  readonly bearingDepthM?: number | undefined;
   readonly odds: number;
 }
 

@@ -225,12 +225,18 @@ export const siteFigures: readonly Descriptor[] = [
     'end of a ground stretch',
     'm',
   ),
-  ...(['odds', 'bearingLevelM'] as const).map((field) =>
+  ...(
+    [
+      ['odds', 'odds of a ground class', ''],
+      ['bearingLevelM', 'bearing level of a ground class', 'm'],
+      ['bearingDepthM', 'depth below the ground at which a ground class bears', 'm'],
+    ] as const
+  ).map(([field, label, unit]) =>
     copied(
       `site/groundStretches/:i/classes/:c/${field}`,
       (at) => `brief/groundStretches/${at.name('i')}/classes/${at.name('c')}/${field}`,
-      field === 'odds' ? 'odds of a ground class' : 'bearing level of a ground class',
-      field === 'odds' ? '' : 'm',
+      label,
+      unit,
     ),
   ),
   copied('site/road/startLevelM', () => 'brief/road/startLevelM', 'proposed road level at the start', 'm'),

@@ -1,7 +1,7 @@
 export { addedFill } from './addedFill.ts';
 export { CROSSFALL, constructionDepth } from './constructionDepth.ts';
 export { deckSpec } from './deckSpec.ts';
-export { groundAt, soffitLimitAt, softZonesAt, stretchAt, waterDepthAt } from './lookups.ts';
+export { bearingLevel, groundAt, soffitLimitAt, softZonesAt, stretchAt, waterDepthAt } from './lookups.ts';
 export type { DepthAlong } from './depthAlong.ts';
 export { headroomSpare, type HeadroomSpare } from './headroomSpare.ts';
 export { profileFor, type ProfileRefusal, type ProfileResult } from './profileFor.ts';

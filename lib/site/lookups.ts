@@ -1,11 +1,10 @@
-import type { GroundStretch, Site, SoffitLimit, Zone } from '../model/index.ts';
+import type { GroundOdds, GroundStretch, Site, SoffitLimit, Zone } from '../model/index.ts';
 
 /** Places closer than this are the same, m. */
 const SAME_M = 1e-6;
 
 /** Ground or bed level at a chainage, m: straight between the surveyed points, level beyond the first and last. */
-export function groundAt(site: Site, chainageM: number): number {
-  const { groundX, groundZ } = site;
+export function groundAt({ groundX, groundZ }: Pick<Site, 'groundX' | 'groundZ'>, chainageM: number): number {
   const n = groundX.length;
   if (chainageM <= groundX[0]!) return groundZ[0]!;
   if (chainageM >= groundX[n - 1]!) return groundZ[n - 1]!;
@@ -31,10 +30,15 @@ export function waterDepthAt(site: Site, chainageM: number): number {
   return depth;
 }
 
-/** Mean level of the bearing stratum of a stretch by its odds, m. */
-function meanBearingLevel({ classes }: GroundStretch): number {
-  return classes.reduce((sum, { odds, bearingLevelM }) => sum + odds * bearingLevelM, 0);
-}
+/** Level of the bearing stratum of a class where the ground lies at a level, m. */
+export const bearingLevel = (
+  { bearingLevelM, bearingDepthM }: Pick<GroundOdds, 'bearingLevelM' | 'bearingDepthM'>,
+  groundLevelM: number,
+): number => (bearingDepthM === undefined ? bearingLevelM! : groundLevelM - bearingDepthM);
+
+/** Mean level of the bearing stratum of a stretch by its odds, m, where the ground lies at a level, m. */
+const meanBearingLevel = ({ classes }: GroundStretch, groundLevelM: number): number =>
+  classes.reduce((sum, one) => sum + one.odds * bearingLevel(one, groundLevelM), 0);
 
 /**
  * Index of the ground stretch a chainage lies in, or of the nearest one; -1 when the site has none. On the boundary of two
@@ -47,7 +51,8 @@ export function stretchAt(site: Site, chainageM: number): number {
     const away = Math.max(stretch.fromM - chainageM, chainageM - stretch.toM, 0);
     const before = site.groundStretches[nearest];
     const same = before !== undefined && Math.abs(away - least) <= SAME_M;
-    if (same ? meanBearingLevel(stretch) < meanBearingLevel(before) : away < least) {
+    const levelM = same ? groundAt(site, chainageM) : 0;
+    if (same ? meanBearingLevel(stretch, levelM) < meanBearingLevel(before, levelM) : away < least) {
       least = away;
       nearest = index;
     }

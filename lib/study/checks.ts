@@ -158,6 +158,16 @@ function groundProblems({ crossing, groundStretches }: Brief): Problem[] {
         ),
       );
     }
+    stretch.classes.forEach(({ bearingLevelM, bearingDepthM }, c) => {
+      if ((bearingLevelM === undefined) !== (bearingDepthM === undefined)) return;
+      const [code, received] =
+        bearingLevelM === undefined ? (['missing', 'neither'] as const) : (['outside', 'both'] as const);
+      const remedy = 'Say at which level it bears, or how deep below the ground, not both';
+      const expected = 'one of bearingLevelM and bearingDepthM';
+      found.push(
+        problem(code, [...path, i, 'classes', c, 'bearingLevelM'], expected, received, { unit: 'm', remedy }),
+      );
+    });
     const before = groundStretches[i - 1];
     if (before !== undefined && before.toM !== stretch.fromM) {
       const remedy = 'Let each stretch begin where the one before ends';

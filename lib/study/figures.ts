@@ -169,6 +169,12 @@ export const studyFigures: readonly Descriptor[] = [
     'm',
     judgedOrPreset,
   ),
+  typed(
+    'brief/groundStretches/:i/classes/:c/bearingDepthM',
+    (at) => `depth below the ground at which it bears, ${oddsOf(at)}`,
+    'm',
+    judgedOrPreset,
+  ),
   typed('brief/access/haulLengthM', 'longest piece that reaches the site', 'm'),
   typed('brief/access/haulMassT', 'heaviest piece that reaches the site', 't'),
   typed('brief/access/crane', 'cranes can stand on site'),

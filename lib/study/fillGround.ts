@@ -36,25 +36,18 @@ export interface GivenStretch {
   readonly fromM: number;
   readonly toM: number;
   readonly known?: boolean | undefined;
-  readonly classes: GroundOdds[] | Unknown;
+  readonly classes: readonly GroundOdds[] | Unknown;
 }
 
-/** Lowest ground level between two chainages at the surveyed points and the ends, m. */
-function lowestGround(crossing: Crossing, fromM: number, toM: number): number {
-  const inside = crossing.ground.filter((point) => point.chainageM >= fromM && point.chainageM <= toM);
-  const among = inside.length > 0 ? inside : crossing.ground;
-  return Math.min(...among.map((point) => point.levelM));
-}
-
-/** Preset odds of ground nobody has looked at; the bearing stratum lies below the lowest ground of the stretch. */
-function presetOdds(crossing: Crossing, fromM: number, toM: number): GroundOdds[] {
-  const levelM = lowestGround(crossing, fromM, toM);
-  return preset.unknown.map(({ ground, odds, bearingDepthM }) => ({
-    ground,
-    odds,
-    bearingLevelM: levelM - bearingDepthM,
-  }));
-}
+/**
+ * Preset odds of ground nobody has looked at; the bearing stratum follows the ground. On the sides of a valley a level one
+ * would lie under as much soft ground as the valley is deep.
+ */
+const presetOdds: readonly GroundOdds[] = preset.unknown.map(({ ground, odds, bearingDepthM }) => ({
+  ground,
+  odds,
+  bearingDepthM,
+}));
 
 /**
  * Fills in what the file leaves unknown about the ground: no stretches at all become one stretch over the crossing, a
@@ -67,7 +60,7 @@ export function fillGround(given: readonly GivenStretch[] | Unknown, crossing: C
       : given;
   return stretches.map((stretch: GivenStretch) => {
     const { fromM, toM, classes } = stretch;
-    if (classes === 'unknown') return { fromM, toM, known: false, classes: presetOdds(crossing, fromM, toM) };
+    if (classes === 'unknown') return { fromM, toM, known: false, classes: presetOdds };
     return { fromM, toM, known: stretch.known ?? false, classes };
   });
 }

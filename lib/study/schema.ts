@@ -117,7 +117,8 @@ const water = z
 
 const groundOdds = z.strictObject({
   ground: z.enum(groundClassIds),
-  bearingLevelM: level,
+  bearingLevelM: level.optional(),
+  bearingDepthM: z.number().min(0).max(500).optional(),
   odds: z.number().min(0).max(1),
 });
 

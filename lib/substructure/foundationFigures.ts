@@ -23,8 +23,10 @@ const footing = (name: string): string => `data/substructure/footing/${name}`;
 const piles = (name: string): string => `data/substructure/piles/${name}`;
 const scour = (name: string): string => `data/substructure/scour/${name}`;
 const isSpread = (at: At): boolean => foundationAt(at).kind === 'spread';
-const stratum = (at: At): string =>
-  `site/groundStretches/${at.support.stretch}/classes/${at.name('f')}/bearingLevelM`;
+const stratum = (at: At): string => `${footPath(at)}/bearingLevelM`;
+const classPath = (at: At): string => `site/groundStretches/${at.support.stretch}/classes/${at.name('f')}`;
+const followsGround = (at: At): boolean =>
+  at.site.groundStretches[at.support.stretch]?.classes[at.index('f')]?.bearingDepthM !== undefined;
 
 /** What a foundation is sized for. */
 const loads = (at: At) =>
@@ -222,12 +224,31 @@ export const foundationFigures: readonly Descriptor[] = [
     compute: ({ ground, foot, cover }) => Math.min(ground, ...foot.map((level) => level + cover)),
   }),
   described({
+    path: foundation('bearingLevelM'),
+    when: followsGround,
+    label: onGround('level at which it bears'),
+    unit: 'm',
+    method: 'difference',
+    formula: 'ground level - depth below the ground',
+    inputs: (at) => ({ ground: `${at.foot}/groundLevelM`, depth: `${classPath(at)}/bearingDepthM` }),
+    compute: ({ ground, depth }) => ground - depth,
+  }),
+  described({
+    path: foundation('bearingLevelM'),
+    label: onGround('level at which it bears'),
+    unit: 'm',
+    method: 'as along the stretch of ground',
+    formula: 'bearing level of the class',
+    inputs: (at) => ({ level: `${classPath(at)}/bearingLevelM` }),
+    compute: ({ level }) => level,
+  }),
+  described({
     path: foundation('odds'),
     label: onGround('odds'),
     unit: '',
     method: 'as given',
     formula: 'odds that the stretch turns out to be this ground',
-    inputs: (at) => ({ odds: `site/groundStretches/${at.support.stretch}/classes/${at.name('f')}/odds` }),
+    inputs: (at) => ({ odds: `${classPath(at)}/odds` }),
     compute: ({ odds }) => odds,
   }),
   ...(['lengthM', 'widthM'] as const).map((side) =>

@@ -1,10 +1,11 @@
-import type { Foundation, GroundOdds, MeasuredLine } from '../model/index.ts';
+import type { Foundation, MeasuredLine } from '../model/index.ts';
 import { pilesOrNearest } from './boredPiles.ts';
 import type { GroundFigures } from './data.ts';
 import { substructureData } from './data.ts';
 import type { FoundationTask } from './foot.ts';
 import type { FootingSize } from './spreadFooting.ts';
 import { spreadFooting } from './spreadFooting.ts';
+import type { GroundHere } from './groundUnder.ts';
 import { pitLines } from './pitLines.ts';
 
 /**
@@ -12,7 +13,7 @@ import { pitLines } from './pitLines.ts';
  * Spread where the bearing stratum, least depth and scour allow a footing within 5 m of the ground, else bored piles.
  * Where neither carries the loads, the group that comes nearest with its overload: the rules put the option out for it.
  */
-export function foundationFor(task: FoundationTask, odds: GroundOdds): Foundation {
+export function foundationFor(task: FoundationTask, odds: GroundHere): Foundation {
   const ground = substructureData.ground[odds.ground];
   const scouredLevelM = task.groundLevelM - (ground.scours ? task.scourM : 0);
   const spread = spreadWhere(task, ground, odds.bearingLevelM, scouredLevelM);
@@ -52,6 +53,7 @@ export function foundationFor(task: FoundationTask, odds: GroundOdds): Foundatio
   return {
     ground: odds.ground,
     odds: odds.odds,
+    bearingLevelM: odds.bearingLevelM,
     kind: 'bored-piles',
     footing: { ...cap, topLevelM: capTopM },
     piles: { count, diameterM, lengthM, toeLevelM },
@@ -84,7 +86,7 @@ function spreadWhere(
   return size === null ? null : { size, undersideM, scours: ground.scours };
 }
 
-function spreadFoundation(task: FoundationTask, odds: GroundOdds, place: SpreadPlace): Foundation {
+function spreadFoundation(task: FoundationTask, odds: GroundHere, place: SpreadPlace): Foundation {
   const { size, undersideM } = place;
   const topLevelM = undersideM + size.depthM;
   const base = {
@@ -94,6 +96,7 @@ function spreadFoundation(task: FoundationTask, odds: GroundOdds, place: SpreadP
   return {
     ground: odds.ground,
     odds: odds.odds,
+    bearingLevelM: odds.bearingLevelM,
     kind: 'spread',
     footing: { ...size, topLevelM },
     piles: null,

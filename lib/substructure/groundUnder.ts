@@ -1,5 +1,12 @@
-import type { GroundOdds, Site } from '../model/index.ts';
-import { stretchAt } from '../site/index.ts';
+import type { GroundClassId, Site } from '../model/index.ts';
+import { bearingLevel, groundAt, stretchAt } from '../site/index.ts';
+
+/** A class that the ground under a support may turn out to be, with the level at which it bears there, m. */
+export interface GroundHere {
+  readonly ground: GroundClassId;
+  readonly bearingLevelM: number;
+  readonly odds: number;
+}
 
 /**
  * The ground stretch under a chainage with the classes it may turn out to be.
@@ -8,7 +15,7 @@ import { stretchAt } from '../site/index.ts';
 export function groundUnder(
   site: Site,
   chainageM: number,
-): { readonly stretch: number; readonly classes: readonly GroundOdds[] } {
+): { readonly stretch: number; readonly classes: readonly GroundHere[] } {
   const stretch = stretchAt(site, chainageM);
   const found = site.groundStretches[stretch];
   if (found === undefined) {
@@ -16,5 +23,11 @@ export function groundUnder(
       `ground at chainage ${chainageM} m: expected at least one ground stretch, received none; give a stretch or mark the ground unknown`,
     );
   }
-  return { stretch, classes: found.classes };
+  const groundM = groundAt(site, chainageM);
+  const classes = found.classes.map((one) => ({
+    ground: one.ground,
+    bearingLevelM: bearingLevel(one, groundM),
+    odds: one.odds,
+  }));
+  return { stretch, classes };
 }

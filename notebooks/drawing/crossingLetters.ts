@@ -228,18 +228,20 @@ export function belowGround(
   });
   const said = new Set<string>();
   const bearing = site.groundStretches.map((stretch) => {
-    const stratum = stratumOf(stretch);
-    if (stratum === null || stratum.likelyM < lowestM || said.has(stratum.words)) return null;
+    const stratum = stratumOf(site, stretch);
+    if (stratum === null || said.has(stratum.words)) return null;
     const from = frame.x(Math.max(stratum.fromM, frame.fromM));
     const to = frame.x(Math.min(stratum.toM, frame.toM));
-    const y = frame.y(stratum.likelyM);
+    const levelAt = (x: number): number => stratum.likely(frame.fromM + (x - frame.left) / frame.pxPerM);
     const put = (words: string): Piece | null => {
       const width = textWidth(words, letters.drawing) + 12;
       if (to - from < width + 20) return null;
-      const candidates = STRATUM_PLACES.map((part) => from + part * (to - from - width));
-      const boxes = candidates.map((x) => levelMarkBox(x, y, words, 'right'));
+      const candidates = STRATUM_PLACES.map((part) => from + part * (to - from - width)).filter(
+        (x) => levelAt(x) >= lowestM,
+      );
+      const boxes = candidates.map((x) => levelMarkBox(x, frame.y(levelAt(x)), words, 'right'));
       const x = candidates[room.placer.choose(boxes, IN_THE_WAY)];
-      return x === undefined ? null : levelMark(x, y, words, { colour: colours.second });
+      return x === undefined ? null : levelMark(x, frame.y(levelAt(x)), words, { colour: colours.second });
     };
     const mark = put(stratum.words) ?? put(stratum.short);
     if (mark !== null) said.add(stratum.words);

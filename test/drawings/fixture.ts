@@ -686,6 +686,7 @@ function foundation(
   return {
     ground,
     odds,
+    bearingLevelM: bearing,
     kind: 'bored-piles',
     footing: { lengthM, widthM: big ? 18 : 11, depthM: big ? 2.8 : 2, topLevelM },
     piles: {
@@ -752,7 +753,13 @@ function supports(
       },
       foundations: (site.groundStretches[stretch]?.classes ?? []).map(
         ({ ground: name, odds, bearingLevelM }) =>
-          foundation(end ? 'abutment' : kind === 'pylon' ? 'pylon' : 'pier', name, odds, bearingLevelM, foot),
+          foundation(
+            end ? 'abutment' : kind === 'pylon' ? 'pylon' : 'pier',
+            name,
+            odds,
+            bearingLevelM!,
+            foot,
+          ),
       ),
     };
   });

@@ -1,4 +1,4 @@
-import type { AskedVariant, KeptOption, Study } from '../../lib/index.ts';
+import { fillGround, type AskedVariant, type KeptOption, type Study } from '../../lib/index.ts';
 import type { Context } from '../../lib/explain/index.ts';
 import { levelCrossing } from '../appraise/levelCrossing.ts';
 import { lowFerry } from '../appraise/studies.ts';
@@ -117,7 +117,7 @@ export const inFlood = (): Context =>
     };
   });
 
-/** A short road bridge as a portal frame, no water about: walls in one with the deck instead of abutments. */
+/** A short road bridge as a portal frame, no water about, on ground nobody has looked at: walls in one with the deck instead of abutments. */
 export const frame = (): Context =>
   once('frame', () => {
     const study = levelCrossing(24);
@@ -126,6 +126,7 @@ export const frame = (): Context =>
       ...study,
       brief: {
         ...brief,
+        groundStretches: fillGround('unknown', brief.crossing),
         obstacles: [
           {
             kind: 'road',

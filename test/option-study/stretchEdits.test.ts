@@ -1,13 +1,15 @@
 import { describe, expect, it } from 'vitest';
 import {
+  bearingBy,
   likeliest,
   missingOdds,
+  withBearingBy,
   withBoundary,
   withoutStretch,
   withSplit,
   withUnknownGround,
 } from '../../notebooks/option-study/brief/stretchEdits.ts';
-import type { Study } from '../../lib/index.ts';
+import { groundAt, survey, type Study } from '../../lib/index.ts';
 import { placesOf, workedStudy } from './study.ts';
 
 const ends = ({ brief }: Study): number[][] => brief.groundStretches.map(({ fromM, toM }) => [fromM, toM]);
@@ -44,6 +46,26 @@ describe('stretches of ground', () => {
     expect(missingOdds(stretch.classes)).toBe(0);
     expect(stretch.classes.length).toBeGreaterThan(2);
     expect(placesOf(unknown)).toEqual([]);
+  });
+
+  it('bear at a level or as deep below the ground, the same in the middle when it is said the other way', () => {
+    const study = workedStudy();
+    const [before] = study.brief.groundStretches[1]!.classes;
+    const down = withBearingBy(study, 1, 0, 'depth');
+    expect([bearingBy(study, 1, 0), bearingBy(down, 1, 0), bearingBy(down, 1, 9)]).toEqual([
+      'level',
+      'depth',
+      undefined,
+    ]);
+    const { bearingLevelM, bearingDepthM } = down.brief.groundStretches[1]!.classes[0]!;
+    expect(bearingLevelM).toBeUndefined();
+    const site = survey(study.brief);
+    const middleM = (1285 + 1355) / 2;
+    expect(groundAt(site, middleM) - bearingDepthM!).toBeCloseTo(before!.bearingLevelM!, 1);
+    expect(placesOf(down)).toEqual([]);
+    const back = withBearingBy(down, 1, 0, 'level');
+    expect(back.brief.groundStretches[1]!.classes[0]!.bearingLevelM).toBeCloseTo(before!.bearingLevelM!, 1);
+    expect(withBearingBy(study, 1, 0, 'level')).toBe(study);
   });
 
   it('say what their odds leave open', () => {

@@ -80,8 +80,11 @@ describe('readStudy', () => {
     const [stretch] = study.brief.groundStretches;
     expect(stretch).toMatchObject({ fromM: 1240, toM: 1470, known: false });
     expect(stretch!.classes.reduce((sum, { odds }) => sum + odds, 0)).toBeCloseTo(1, 12);
-    // Lowest ground of the stretch is the bed at 3.70; no preset stratum lies above it.
-    expect(Math.max(...stretch!.classes.map(({ bearingLevelM }) => bearingLevelM))).toBeLessThanOrEqual(3.7);
+    // Nothing is said of levels: the bearing stratum follows the ground, never above it.
+    for (const { bearingLevelM, bearingDepthM } of stretch!.classes) {
+      expect(bearingLevelM).toBeUndefined();
+      expect(bearingDepthM).toBeGreaterThan(0);
+    }
     expect(study.books.draws).toBe(10_000);
     expect(study.decision).toBeNull();
   });
@@ -191,6 +194,18 @@ describe('readStudy', () => {
       (s) => (s['brief']!['groundStretches'][0]['classes'][0]['odds'] = set(0.9)),
       'does-not-sum',
       'brief.groundStretches[0].classes',
+    ],
+    [
+      'a ground class that says neither level nor depth',
+      (s) => delete s['brief']!['groundStretches'][0]['classes'][0]['bearingLevelM'],
+      'missing',
+      'brief.groundStretches[0].classes[0].bearingLevelM',
+    ],
+    [
+      'a ground class that says both level and depth',
+      (s) => (s['brief']!['groundStretches'][0]['classes'][0]['bearingDepthM'] = set(3)),
+      'outside',
+      'brief.groundStretches[0].classes[0].bearingLevelM',
     ],
     [
       'a gap in the ground',

@@ -26,6 +26,32 @@ it('standSupports(one unit) stands abutments at the ends and piers between, on t
   }
 });
 
+it('standSupports(ground that is followed) founds as deep below the ground on the side of a valley as on its floor', () => {
+  // Sides that fall by 20 m over 60 m, as steep as those of a valley cut into what bears.
+  const valley = (bearing: { bearingDepthM: number } | { bearingLevelM: number }): Site => ({
+    ...crossing,
+    groundX: [0, 60, 140, 200],
+    groundZ: [0, -20, -20, 0],
+    waters: [],
+    groundStretches: [
+      { fromM: 0, toM: 200, known: false, classes: [{ ground: 'gravel', ...bearing, odds: 1 }] },
+    ],
+  });
+  const spans = [30, 40, 60, 40, 30];
+  const supports = (site: Site): Support[] =>
+    standSupports(site, [unitOn([0, 30, 70, 130, 170, 200])], [plainDesign(spans)], profile);
+  const below = ({ groundLevelM, foundations: [one] }: Support): number => groundLevelM - one!.bearingLevelM;
+  const pilesM3 = ({ foundations: [one] }: Support): number => sum(one!.lines, 'bored-pile');
+  for (const support of supports(valley({ bearingDepthM: 7 }))) expect(below(support)).toBeCloseTo(7, 9);
+  const level = supports(valley({ bearingLevelM: -27 }));
+  expect(below(level[2]!)).toBeCloseTo(7, 9);
+  expect(below(level[1]!)).toBeCloseTo(17, 9);
+  // Piles on the side reach the level stratum through ten metres more.
+  const followed = supports(valley({ bearingDepthM: 7 }));
+  expect(pilesM3(level[1]!)).toBeGreaterThan(1.2 * pilesM3(followed[1]!));
+  expect(pilesM3(level[2]!)).toBe(pilesM3(followed[2]!));
+});
+
 it('standSupports(one unit) has one fixed point, joints at the ends only, and movement that grows with distance', () => {
   const supports = threeSpans();
   expect(supports.map((s) => s.articulation.fixed)).toEqual([false, true, false, false]);

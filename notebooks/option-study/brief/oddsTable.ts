@@ -8,6 +8,7 @@ import {
 import { fixed } from '../../format.ts';
 import { h } from '../../html.ts';
 import {
+  getAt,
   putAt,
   standing,
   waysOn,
@@ -22,13 +23,16 @@ import { fieldRow, listAction, saidBelow } from './fieldTable.ts';
 import { withEntry, withoutEntry } from './listEdits.ts';
 import { problemBeside } from './problemBeside.ts';
 import {
+  bearingBy,
   boundaryAt,
   likeliest,
   missingOdds,
+  withBearingBy,
   withBoundary,
   withoutStretch,
   withSplit,
   withUnknownGround,
+  type BearingBy,
 } from './stretchEdits.ts';
 
 const list: Path = ['brief', 'groundStretches'];
@@ -56,6 +60,32 @@ const isProved = (stretch: number): Made<'known' | 'unknown'> => ({
   get: ({ brief }) => (brief.groundStretches[stretch]!.known ? 'known' : 'unknown'),
   put: (study, value) => putAt(study, [...list, stretch, 'known'], value === 'known'),
   from: () => [[...list, stretch, 'known']],
+});
+
+/** Where a class bears, however it is said. */
+const bears = (stretch: number, c: number): Made<Figure> => {
+  const place = (study: Study): Path => {
+    const key = bearingBy(study, stretch, c) === 'depth' ? 'bearingDepthM' : 'bearingLevelM';
+    return [...list, stretch, 'classes', c, key];
+  };
+  return {
+    key: `brief.groundStretches.${stretch}.classes.${c}.bears`,
+    has: (study) => bearingBy(study, stretch, c) !== undefined,
+    get: (study) => getAt(study, place(study)) as Figure,
+    put: (study, value) => putAt(study, place(study), value),
+    owns: [
+      [...list, stretch, 'classes', c, 'bearingLevelM'],
+      [...list, stretch, 'classes', c, 'bearingDepthM'],
+    ],
+    from: (study) => [place(study)],
+  };
+};
+
+const bearsBy = (stretch: number, c: number): Made<BearingBy> => ({
+  key: `brief.groundStretches.${stretch}.classes.${c}.bearsBy`,
+  has: (study) => bearingBy(study, stretch, c) !== undefined,
+  get: (study) => bearingBy(study, stretch, c)!,
+  put: (study, by) => withBearingBy(study, stretch, c, by),
 });
 
 function heading(fields: Fields, index: number): HTMLElement {
@@ -93,7 +123,19 @@ function classRow(
       label: `${named}, ground`,
       choices: groundClassIds.map((value) => ({ value, words: shortNames[value] })),
     }),
-    fields.figure(at('bearingLevelM'), { label: `${named}, bearing level`, places: 1, unit: 'm', step: 0.5 }),
+    h(
+      'span',
+      { class: 'bears' },
+      fields.figure(bears(index, c), { label: `${named}, bears at`, places: 1, unit: 'm', step: 0.5 }),
+      ' ',
+      fields.choice(bearsBy(index, c), {
+        label: `${named}, bears at a level or a depth`,
+        choices: [
+          { value: 'level', words: 'level' },
+          { value: 'depth', words: 'down' },
+        ],
+      }),
+    ),
     fields.figure(at('odds'), {
       label: `${named}, odds`,
       places: 0,
@@ -162,8 +204,8 @@ function stretchTable(fields: Fields, store: StudyStore, study: Study, index: nu
     const { classes: had } = now.brief.groundStretches[index]!;
     const free = groundClassIds.find((id) => !had.some(({ ground }) => ground === id)) ?? 'rock';
     const entry = {
+      ...had.at(-1)!,
       ground: free,
-      bearingLevelM: had.at(-1)!.bearingLevelM,
       odds: Math.max(0, missingOdds(had)),
     };
     return withEntry(now, classes, had.length, entry);

@@ -1,4 +1,4 @@
-import { fillGround, type GroundOdds, type GroundStretch, type Study } from '../../../lib/index.ts';
+import { fillGround, groundAt, type GroundOdds, type GroundStretch, type Study } from '../../../lib/index.ts';
 import { putAt, type Path } from '../../page/place.ts';
 
 const list: Path = ['brief', 'groundStretches'];
@@ -61,6 +61,33 @@ export const missingOdds = (classes: readonly GroundOdds[]): number =>
 /** The likeliest of some classes, the first of equals. */
 export const likeliest = (classes: readonly GroundOdds[]): number =>
   classes.reduce((best, { odds }, i) => (odds > classes[best]!.odds ? i : best), 0);
+
+/** How it is said where a class bears: at a level, or as deep below the ground, which it follows. */
+export type BearingBy = 'level' | 'depth';
+
+/** Which of the two a class says; undefined where there is no such class. */
+export function bearingBy({ brief }: Study, index: number, c: number): BearingBy | undefined {
+  const one = brief.groundStretches[index]?.classes[c];
+  return one && (one.bearingDepthM === undefined ? 'level' : 'depth');
+}
+
+/** A class that says the other of the two, so that it bears as before in the middle of its stretch. */
+export function withBearingBy(study: Study, index: number, c: number, by: BearingBy): Study {
+  const { crossing, groundStretches } = study.brief;
+  const stretch = groundStretches[index]!;
+  const { bearingLevelM = 0, bearingDepthM, ...one } = stretch.classes[c]!;
+  if ((bearingDepthM === undefined) === (by === 'level')) return study;
+  const line = {
+    groundX: crossing.ground.map(({ chainageM }) => chainageM),
+    groundZ: crossing.ground.map(({ levelM }) => levelM),
+  };
+  const groundM = groundAt(line, (stretch.fromM + stretch.toM) / 2);
+  const changed =
+    by === 'depth'
+      ? { ...one, bearingDepthM: Math.max(0, roundM(groundM - bearingLevelM)) }
+      : { ...one, bearingLevelM: roundM(groundM - bearingDepthM!) };
+  return putAt(study, [...list, index, 'classes', c], changed);
+}
 
 /** A stretch of which nothing is known: it takes the odds the tool gives to ground nobody has looked at. */
 export function withUnknownGround(study: Study, index: number): Study {
