@@ -87,6 +87,7 @@ export interface PierShaft {
   readonly lengthM: number;
   readonly widthM: number;
   readonly columns: number;
+  readonly hollow?: true;
   readonly concreteM3: number;
   readonly reinforcementKg: number;
 }

@@ -25,7 +25,7 @@ export interface FoundationTask extends FootTask {
   readonly shaftFootM: number;
   readonly shaftAreaM2: number;
   readonly shaftBarsKgM3: number;
-  readonly shaftItem: 'pier-concrete' | 'abutment-concrete' | 'pylon-concrete';
+  readonly shaftItem: 'pier-concrete' | 'hollow-pier-concrete' | 'abutment-concrete' | 'pylon-concrete';
 }
 
 /**

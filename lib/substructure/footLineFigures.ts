@@ -206,15 +206,13 @@ export const footLineFigures: readonly Descriptor[] = [
       length: `${at.foot}/shaft/lengthM`,
       width: `${at.foot}/shaft/widthM`,
       columns: `${at.foot}/shaft/columns`,
-      above: `${at.foot}/topLevelM`,
-      hollow: 'data/substructure/pier/hollowAboveM',
       wall: 'data/substructure/pier/wallM',
     }),
     compute: (v, at) => {
       const width = v.columns > 1 ? v.length : v.width;
-      const hollow =
-        at.support.kind !== 'abutment' && at.support.kind !== 'pylon' && v.above - v.foot > v.hollow;
-      const inside = hollow ? Math.max(0, v.length - 2 * v.wall) * Math.max(0, width - 2 * v.wall) : 0;
+      const inside = at.support.shaft.hollow
+        ? Math.max(0, v.length - 2 * v.wall) * Math.max(0, width - 2 * v.wall)
+        : 0;
       return (v.length * width - inside) * v.columns * (v.foot - v.top);
     },
   }),

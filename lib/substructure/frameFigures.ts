@@ -148,7 +148,7 @@ export const frameFigures: readonly Descriptor[] = [
     unit: 'no',
     method: 'choice',
     formula: 'one leaf, or one hollow shaft above the height for these, in one with the box',
-    inputs: (at) => ({ height: `${at.foot}/heightM`, hollow: pier('hollowAboveM') }),
+    inputs: (at) => ({ height: `${at.foot}/heightM`, hollow: pier('framedHollowAboveM') }),
   }),
   ...(['concreteM3', 'reinforcementKg'] as const).map((what) =>
     described({
@@ -163,14 +163,13 @@ export const frameFigures: readonly Descriptor[] = [
         foot: `${at.foot}/footM`,
         length: `${at.foot}/shaft/lengthM`,
         width: `${at.foot}/shaft/widthM`,
-        hollowAbove: pier('hollowAboveM'),
         wall: pier('wallM'),
         leafBars: pier('framedLeafBarsKgM3'),
         hollowBars: pier('framedHollowBarsKgM3'),
       }),
-      compute: (v) => {
+      compute: (v, at) => {
         const height = Math.max(0, v.top - v.foot);
-        const hollow = height > v.hollowAbove;
+        const hollow = at.support.shaft.hollow === true;
         const inside = hollow ? Math.max(0, v.length - 2 * v.wall) * Math.max(0, v.width - 2 * v.wall) : 0;
         const perM3 = what === 'concreteM3' ? 1 : hollow ? v.hollowBars : v.leafBars;
         return (v.length * v.width - inside) * height * perM3;
@@ -189,12 +188,11 @@ export const frameFigures: readonly Descriptor[] = [
       foot: `${at.foot}/footM`,
       length: `${at.foot}/shaft/lengthM`,
       width: `${at.foot}/shaft/widthM`,
-      hollowAbove: pier('hollowAboveM'),
       wall: pier('wallM'),
       modulus: 'data/substructure/concrete/modulusMPa',
       share: 'data/substructure/concrete/crackedShare',
     }),
-    compute: (v) => crackedEI(shaftInertia(v.length, v.width, Math.max(0, v.top - v.foot) > v.hollowAbove)),
+    compute: (v, at) => crackedEI(shaftInertia(v.length, v.width, at.support.shaft.hollow === true)),
     sources: ['EN 1992-1-1 5.4(3) (from memory)'],
   }),
   described({

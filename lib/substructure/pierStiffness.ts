@@ -2,7 +2,15 @@ import type { Site } from '../model/index.ts';
 import { substructureData } from './data.ts';
 import { swayOf } from './framedShaft.ts';
 import { settingAt } from './setting.ts';
-import { gyration, shaftInertia, shaftWidth } from './sizeShaft.ts';
+import {
+  gyration,
+  leastThickness,
+  sectionArea,
+  shaftInertia,
+  shaftPrice,
+  shaftShapes,
+  shaftWidth,
+} from './sizeShaft.ts';
 
 /** Whether a pier at a chainage is a leaf because water reaches it or traffic may strike it. */
 export function leafAt(site: Site, chainageM: number): boolean {
@@ -16,18 +24,23 @@ interface SlenderShaft {
   readonly inertiaM4: number;
 }
 
-/** A shaft as thick as its slenderness alone asks for, in the steps in which shafts are sized. */
-function slenderShaft(alongSupportsM: number, heightM: number, isLeaf: boolean): SlenderShaft {
+/** A shaft as thick as its slenderness alone asks for, in the steps in which shafts are sized, of the shape that costs least. */
+function slenderShaft(alongSupportsM: number, heightM: number, isLeaf: boolean, framed?: true): SlenderShaft {
   const { pier } = substructureData;
-  const isHollow = heightM > pier.hollowAboveM;
-  const isOne = isLeaf || isHollow;
-  const slender = (pier.effectiveLength * heightM) / (gyration(isHollow) * pier.slenderness);
-  const steps = Math.ceil(slender / pier.stepM - 1e-9);
-  const lengthM = Math.max(isOne ? pier.leastLeafM : pier.leastColumnM, steps * pier.stepM);
-  return {
-    lengthM,
-    inertiaM4: isOne ? shaftInertia(lengthM, shaftWidth(alongSupportsM), isHollow) : (2 * lengthM ** 4) / 12,
-  };
+  const leafM = shaftWidth(alongSupportsM);
+  const shafts = shaftShapes({ heightM, leaf: isLeaf, ...(framed && { framed }) }).map((shape) => {
+    const { columns, hollow } = shape;
+    const slender = (pier.effectiveLength * heightM) / (gyration(hollow) * pier.slenderness);
+    const steps = Math.ceil(slender / pier.stepM - 1e-9);
+    const lengthM = Math.max(leastThickness(shape, framed), steps * pier.stepM);
+    const widthM = columns === 1 ? leafM : lengthM;
+    return {
+      lengthM,
+      inertiaM4: columns * shaftInertia(lengthM, widthM, hollow),
+      worthM2: shaftPrice(shape) * columns * sectionArea(lengthM, widthM, hollow),
+    };
+  });
+  return shafts.reduce((best, one) => (one.worthM2 < best.worthM2 ? one : best));
 }
 
 /** Bending stiffness that cracks and creep leave a shaft, kNm2 (EN 1992-1-1 5.4(3), see the data file). */
@@ -45,6 +58,6 @@ export function pierStiffness(alongSupportsM: number, heightM: number, isLeaf: b
 
 /** The same of a leaf that the deck is cast in with, kN per m: up to 12 E I / h^3. */
 export function framedStiffness(alongSupportsM: number, heightM: number, deckTurnKNm: number): number {
-  const eiKNm2 = crackedEI(slenderShaft(alongSupportsM, heightM, true).inertiaM4);
+  const eiKNm2 = crackedEI(slenderShaft(alongSupportsM, heightM, true, true).inertiaM4);
   return swayOf({ heightM, eiKNm2, deckTurnKNm });
 }

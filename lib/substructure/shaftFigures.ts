@@ -165,11 +165,12 @@ export const shaftFigures: readonly Descriptor[] = [
         ? 'one wall; columns under the beam of a spill-through abutment by their spacing, at least two'
         : isPylon(at)
           ? 'two legs'
-          : 'one leaf in a flood, beside traffic or above the height for hollow shafts; two columns with a head elsewhere',
+          : 'one leaf in a flood or beside traffic, two columns with a head elsewhere, or one hollow shaft, where it is high enough for that and that costs less',
     inputs: (at) => ({
       height: `${at.foot}/heightM`,
       flood: `${at.foot}/floodDepthM`,
-      hollow: pier('hollowAboveM'),
+      price: pier('hollowPrice'),
+      from: pier('hollowFromM'),
     }),
   }),
   described({
@@ -224,14 +225,13 @@ export const shaftFigures: readonly Descriptor[] = [
         width: `${at.foot}/shaft/widthM`,
         columns: `${at.foot}/shaft/columns`,
         head: pier('headDepthM'),
-        hollowAbove: pier('hollowAboveM'),
         wall: pier('wallM'),
         leafBars: pier('leafBarsKgM3'),
         columnBars: pier('columnBarsKgM3'),
         hollowBars: pier('hollowBarsKgM3'),
         headBars: 'data/substructure/footing/barsKgM3',
       }),
-      compute: (v) => {
+      compute: (v, at) => {
         const height = Math.max(0, v.top - v.foot);
         const perM3 = (bars: number): number => (what === 'concreteM3' ? 1 : bars);
         if (v.columns === 2) {
@@ -240,7 +240,7 @@ export const shaftFigures: readonly Descriptor[] = [
             v.head * v.length * v.width * perM3(v.headBars)
           );
         }
-        const hollow = height > v.hollowAbove;
+        const hollow = at.support.shaft.hollow === true;
         const inside = hollow ? Math.max(0, v.length - 2 * v.wall) * Math.max(0, v.width - 2 * v.wall) : 0;
         return (v.length * v.width - inside) * height * perM3(hollow ? v.hollowBars : v.leafBars);
       },

@@ -24,42 +24,90 @@ export interface ShaftTask {
 
 const thickest = 8;
 
+/** How a shaft is made: one wall, solid or hollow, or two solid columns with a head. */
+export interface ShaftShape {
+  readonly columns: 1 | 2;
+  readonly hollow: boolean;
+}
+
+/** What a pier may be made as: one that the deck bends is kept thin, the others may be hollow where that costs less. */
+export function shaftShapes({
+  heightM,
+  leaf,
+  framed,
+}: Pick<ShaftTask, 'heightM' | 'leaf' | 'framed'>): readonly ShaftShape[] {
+  const { framedHollowAboveM, hollowFromM } = substructureData.pier;
+  if (framed) return [{ columns: 1, hollow: heightM > framedHollowAboveM }];
+  const solid = { columns: leaf ? 1 : 2, hollow: false } as const;
+  return heightM < hollowFromM ? [solid] : [solid, { columns: 1, hollow: true }];
+}
+
+/** Least thickness of a shaft, m. */
+export function leastThickness({ columns, hollow }: ShaftShape, framed = false): number {
+  const { pier } = substructureData;
+  if (columns === 2) return pier.leastColumnM;
+  return hollow && !framed ? pier.leastHollowM : pier.leastLeafM;
+}
+
+/** What concrete of a shaft costs beside that of a solid one. */
+export const shaftPrice = ({ hollow }: ShaftShape): number =>
+  hollow ? substructureData.pier.hollowPrice : 1;
+
 /**
  * Sizes a pier shaft by axial stress, slenderness and bending at its foot: the thinnest in steps that passes all three.
- * One leaf where struck or in water, two columns with a head elsewhere, a hollow shaft above 30 m. Bars by published ratios.
- * Returns dimensions along (length) and across (width) the road, m, concrete in m3 and bars in kg.
+ * One leaf where struck or in water, two columns with a head elsewhere, or one hollow shaft where that costs less. Bars by
+ * published ratios. Returns dimensions along (length) and across (width) the road, m, concrete in m3 and bars in kg.
  * A shaft that would be thicker than 8 m is returned at 8 m: its height is far outside the tool's range. One that the deck
  * is cast in with draws the more from what moves the thicker it is: where none passes, the one that is bent least beyond
  * what it carries is returned.
  */
 export function sizeShaft(task: ShaftTask): PierShaft {
+  const [first, ...others] = shaftShapes(task).map((shape) => shaftOf(task, shape));
+  return others.reduce((best, one) => (isCheaper(one, best) ? one : best), first!).shaft;
+}
+
+interface SizedShaft {
+  readonly shaft: PierShaft;
+  readonly passes: boolean;
+  /** Concrete, m3 of a solid shaft that costs as much. */
+  readonly worthM3: number;
+}
+
+const isCheaper = (one: SizedShaft, other: SizedShaft): boolean =>
+  one.passes === other.passes ? one.worthM3 < other.worthM3 : one.passes;
+
+function shaftOf(task: ShaftTask, shape: ShaftShape): SizedShaft {
   const { pier } = substructureData;
-  const hollow = task.heightM > pier.hollowAboveM;
-  const leaf = task.leaf || task.framed === true || hollow;
-  const columns = leaf ? 1 : 2;
+  const { columns, hollow } = shape;
   const widthM = shaftWidth(task.alongSupportsM);
+  const isOne = columns === 1;
   const sectionOf = (lengthM: number): Section => ({
     lengthM,
-    widthM: leaf ? widthM : lengthM,
+    widthM: isOne ? widthM : lengthM,
     columns,
     hollow,
   });
-  const first = leaf ? pier.leastLeafM : pier.leastColumnM;
+  const first = leastThickness(shape, task.framed);
   let t = first;
   while (t < thickest && !passes(task, sectionOf(t))) t = round1(t + pier.stepM);
   if (task.framed && !passes(task, sectionOf(t))) t = leastBent(task, sectionOf, first);
-  const head = leaf ? 0 : pier.headDepthM * t * widthM;
-  const heightM = leaf ? task.heightM : Math.max(0, task.heightM - pier.headDepthM);
-  const area = sectionArea(t, leaf ? widthM : t, hollow) * columns;
+  const head = isOne ? 0 : pier.headDepthM * t * widthM;
+  const heightM = isOne ? task.heightM : Math.max(0, task.heightM - pier.headDepthM);
+  const area = sectionArea(t, isOne ? widthM : t, hollow) * columns;
   const concreteM3 = area * heightM + head;
   const ratio = barsKgM3(task, columns, hollow);
   const headRatio = substructureData.footing.barsKgM3;
   return {
-    lengthM: t,
-    widthM,
-    columns,
-    concreteM3,
-    reinforcementKg: area * heightM * ratio + head * headRatio,
+    shaft: {
+      lengthM: t,
+      widthM,
+      columns,
+      ...(hollow && { hollow }),
+      concreteM3,
+      reinforcementKg: area * heightM * ratio + head * headRatio,
+    },
+    passes: passes(task, sectionOf(t)),
+    worthM3: shaftPrice(shape) * concreteM3,
   };
 }
 

@@ -1,4 +1,4 @@
-import type { Site, Support } from '../model/index.ts';
+import type { PierShaft, Site, Support } from '../model/index.ts';
 import { alongSupportsM } from '../site/index.ts';
 import { substructureData } from './data.ts';
 import type { FoundationTask } from './foot.ts';
@@ -37,12 +37,12 @@ export function standPier(site: Site, ask: SupportAsk): Support {
   const wet = setting.floodDepthM > 0 || setting.impact !== null;
   const designMN = designLoadMN(ask);
   const pylon = ask.pylon;
-  const hollow = shaftHeightM > pier.hollowAboveM;
+  const isFramedHollow = shaftHeightM > pier.framedHollowAboveM;
   const framedBy = (lengthM: number): FramedShaft | null =>
     frame
       ? {
           heightM: shaftHeightM,
-          eiKNm2: crackedEI(shaftInertia(lengthM, shaftWidth(alongSupportsM(site)), hollow)),
+          eiKNm2: crackedEI(shaftInertia(lengthM, shaftWidth(alongSupportsM(site)), isFramedHollow)),
           deckTurnKNm: frame.deckTurnKNm,
         }
       : null;
@@ -61,9 +61,10 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     designVerticalKN: designMN * 1000,
     permanentKN: ask.permanentKN,
   };
-  const shaft = pylon
+  const shaft: PierShaft = pylon
     ? { lengthM: pylon.lengthM, widthM: pylon.widthM, columns: 2, concreteM3: 0, reinforcementKg: 0 }
     : sizeShaft(shaftTask);
+  const hollow = shaft.hollow === true;
   const weightKN = pylon ? pylon.weightKN : shaft.concreteM3 * concrete.weightKNm3;
   const framed = framedBy(shaft.lengthM);
   const combos = pierCombos(
@@ -77,6 +78,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     },
     framed,
   );
+  const item = hollow ? 'hollow-pier-concrete' : 'pier-concrete';
   const columnWidth = shaft.columns === 2 ? shaft.lengthM : shaft.widthM;
   const task: FoundationTask = {
     name: ask.name,
@@ -97,7 +99,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
       : shaft.columns === 2
         ? pier.columnBarsKgM3
         : pier.leafBarsKgM3,
-    shaftItem: pylon ? 'pylon-concrete' : 'pier-concrete',
+    shaftItem: pylon ? 'pylon-concrete' : item,
   };
   const ground = groundUnder(site, ask.chainageM);
   const how =
@@ -123,7 +125,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     },
     lines: [
       ...articulationLines(ask, alongSupportsM(site)),
-      ...shaftLines(ask, shaft, 'piers', 'pier-concrete', how),
+      ...shaftLines(ask, shaft, 'piers', item, how),
       ...waterAccessLines(ask, setting.waterDepthM),
       ...softZoneLines(ask, setting.soft),
     ],

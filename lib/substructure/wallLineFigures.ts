@@ -261,7 +261,7 @@ export const wallLineFigures: readonly Descriptor[] = [
   }),
   described({
     path,
-    when: is('pier-concrete'),
+    when: (at) => is('pier-concrete')(at) || is('hollow-pier-concrete')(at),
     label: (at) => `shaft, ${supportName(at)}`,
     unit: 'm3',
     method: 'as sized',
