@@ -90,4 +90,7 @@ it('turnedOver(skew) takes what lasts the other way without the traffic that rel
   // By hand: with skew traffic 800 + 600 - 300 x 2 = 800 kNm x 1.35 = 1,080; without 800 - 200 x 2 = 400 x 1.35 = 540.
   expect(over(-400)).toBeCloseTo(1080, 9);
   expect(over(-900)).toBeCloseTo(900 + 540, 9);
+  // A slight twist presses more than it turns: 800 + 50 - 600 would be less than 400 without it.
+  const slight = { lastingKNm: 10, trafficKNm: 50, pressKN: 300 };
+  expect(turnedOver({ ...turning, skew: slight }, 4, 4, factors).overKNm).toBeCloseTo(10 + 540, 9);
 });
