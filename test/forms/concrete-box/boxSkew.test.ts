@@ -38,6 +38,25 @@ describe('size(concrete-box) on its bearings on a skew', () => {
   });
 });
 
+describe('size(concrete-box) on a skew and a curve', () => {
+  const said = (asked: Partial<UnitTask>): string =>
+    at(asked).warnings.find((warning) => warning.startsWith('Skew'))!;
+
+  it('blames the skew where a bearing lifts with it and not without', () => {
+    expect(uplift(at({ planRadiusM: 150 }))).toBeLessThanOrEqual(1);
+    expect(said({ planRadiusM: 150, skewDeg: 10 })).toMatch(/the acute would lift.*tied down/);
+  });
+
+  it('blames the curve where a bearing lifts on square supports already, and sizes those', () => {
+    const square = at({ planRadiusM: 60 });
+    expect(uplift(square)).toBeGreaterThan(1);
+    expect(uplift(at({ planRadiusM: 60, skewDeg: 10 }))).toBe(uplift(square));
+    const words = said({ planRadiusM: 60, skewDeg: 10 });
+    expect(words).toMatch(/on square supports already, by eccentric traffic and the curve \(120 % /);
+    expect(words).not.toMatch(/acute|tied down/);
+  });
+});
+
 describe('boxSkew(model, box)', () => {
   it('of a single span under traffic is what the prismatic box would have', () => {
     const { model, box, skew } = torques([40], 2.1);
