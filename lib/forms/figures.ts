@@ -232,6 +232,18 @@ export const designFigures: readonly Descriptor[] = [
     sources: ['AASHTO LRFD 4.6.2.2.3c (from memory)'],
   }),
   described({
+    path: unit('skewPressKN'),
+    label: (at) => `what skew ends press on all bearings of an end${name(at)}`,
+    unit: 'kN',
+    method: 'product',
+    formula: 'bearings under the boxes x what skew ends shift to the obtuse one of them',
+    inputs: (at) => ({
+      boxes: at.design.figures['boxes'] === undefined ? [] : [`${at.unit}/figures/boxes`],
+      shifted: `${at.unit}/figures/skewBearingKN`,
+    }),
+    compute: ({ boxes, shifted }) => 2 * (boxes[0] ?? 1) * shifted,
+  }),
+  described({
     path: unit('reactions/:s/:field'),
     label: (at) => `${loadWords[at.name('field')]} reaction at support ${at.index('s') + 1}${name(at)}`,
     unit: 'kN',

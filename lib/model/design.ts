@@ -194,6 +194,11 @@ export interface Design {
   readonly reactions: readonly SupportReaction[];
   /** What traffic puts on the bearing at an obtuse corner over that of a square deck, above 1; absent on a square deck and where the form has no figure for it. */
   readonly obtuseCorner?: number;
+  /**
+   * What skew ends press on the bearings of an end or of the pier next to it where all of them are made like the one at the
+   * obtuse corner, kN, design; absent where ends are square or do not twist the deck.
+   */
+  readonly skewPressKN?: number;
   /** Walls in one with the deck; absent where it rests on bearings. */
   readonly walls?: readonly IntegralWall[];
   /** Piers in one with the deck; absent where it rests on bearings. */

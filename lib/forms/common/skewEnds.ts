@@ -11,6 +11,9 @@ export const skewFigures = (torqueKNm: number, apartM: number): Record<string, n
 const uplift = ({ checks }: Design): number | undefined =>
   checks.find(({ id }) => id === 'bearing-uplift')?.utilisation;
 
+/** Bearings at a support: two under every box. */
+const bearingsOf = ({ figures }: Design): number => 2 * (figures['boxes'] ?? 1);
+
 const percent = (use: number): string => `${(100 * use).toFixed(0)} % of its limit`;
 
 /**
@@ -26,13 +29,13 @@ export function withSkewEnds(task: UnitTask, size: (task: UnitTask) => Design): 
   const skew = size(task);
   const lifts = uplift(skew);
   const { skewTorqueKNm = 0, skewBearingKN = 0 } = skew.figures;
-  const priced = skew.obtuseCorner === undefined ? '; bearings are priced at their mean' : '';
   if (lifts === undefined || carries(lifts))
     return {
       ...skew,
+      skewPressKN: bearingsOf(skew) * skewBearingKN,
       warnings: [
         ...skew.warnings,
-        `${skewWords(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(skewTorqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(skewBearingKN / 1e3).toFixed(1)} MN more and the acute by as much less${priced}.`,
+        `${skewWords(skewDeg)}: bearings stand square to the road at the piers, and along the abutments at the ends. There the twist of ${(skewTorqueKNm / 1e3).toFixed(1)} MNm (design) presses the obtuse bearing by ${(skewBearingKN / 1e3).toFixed(1)} MN more and the acute by as much less.`,
       ],
     };
   const plain = size(square);
