@@ -1,5 +1,6 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { depthWindow } from '../rules/figures.ts';
+import { squareEndFigures } from './common/squareEnds.ts';
 import { variantFigures } from './variantFigures.ts';
 
 const kept = (at: At): number => at.study.options.kept.findIndex(({ number }) => number === at.option.number);
@@ -44,6 +45,7 @@ const figureWords = (id: string): string =>
 /** What a unit is sized for, and what every form reports of it. What only one form reports stands beside that form. */
 export const designFigures: readonly Descriptor[] = [
   ...variantFigures,
+  ...squareEndFigures,
   described({
     path: unit('task/spansM/:i'),
     label: (at) => `span ${at.index('i') + 1}${name(at)}`,

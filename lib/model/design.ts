@@ -28,6 +28,8 @@ export interface UnitTask {
   readonly struts?: true;
   /** Concrete boxes: ribs across the deck under the slab, so that fewer cells carry it. */
   readonly ribs?: true;
+  /** Boxes on a skew: ends square to the road; along the skew when absent, where no bearing lifts there. */
+  readonly squareEnds?: true;
   /** Concrete boxes: between the axes of the outer webs at the top, m; in a fixed proportion to the deck when absent. */
   readonly boxWidthM?: number;
   /** Concrete boxes: cylinder strength of the concrete, MPa; the usual one of the standard when absent. */

@@ -33,6 +33,7 @@ export const compositeBox: FormModule = {
   name: 'Composite box girders',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
+  choices: ['squareEnds'],
   size: (task) => withSkewEnds(task, size),
 };
 

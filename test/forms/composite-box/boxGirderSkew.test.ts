@@ -147,11 +147,13 @@ describe('size(composite-box) on a skew', () => {
   });
 
   it('takes its ends square where the acute bearing would lift, as square as a deck without a skew', () => {
-    const { task: _skew, warnings, ...skew } = at({ skewDeg: 30 });
-    const { task: _square, warnings: _none, ...square } = at({});
+    const { task: _skew, warnings, lines, ...skew } = at({ skewDeg: 30 });
+    const { task: _square, warnings: _none, lines: plain, ...square } = at({});
     expect(skew).toEqual(square);
-    // By hand: 12 m wide, tan 30 = 0.5774: 6.9 m of slab at one edge.
-    expect(warnings.join(' ')).toMatch(/acute would lift.*6\.9 m of slab or sill/);
+    // By hand: 12 m wide, tan 30 = 0.5774: 6.9 m of sill at one edge, two wedges of 12 x 6.928 / 2 x 1.2 m thick.
+    expect(warnings.join(' ')).toMatch(/acute would lift.*6\.9 m of sill and slab/);
+    expect(lines.slice(0, -2)).toEqual(plain);
+    expect(lines.at(-2)!.quantity).toBeCloseTo(99.77, 2);
   });
 
   it('is the same on either side', () => {

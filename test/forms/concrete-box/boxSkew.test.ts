@@ -30,12 +30,33 @@ describe('size(concrete-box) on its bearings on a skew', () => {
   });
 
   it('takes its ends square where the acute bearing would lift, as square as a deck without a skew', () => {
-    const { task: _skew, warnings, ...skew } = at({ skewDeg: 30 });
-    const { task: _square, warnings: _none, ...square } = at({});
+    const { task: _skew, warnings, lines, ...skew } = at({ skewDeg: 30 });
+    const { task: _square, warnings: _none, lines: plain, ...square } = at({});
     expect(skew).toEqual(square);
-    // By hand: 12 m wide, tan 30 = 0.5774: 6.9 m of slab at one edge.
-    expect(warnings.join(' ')).toMatch(/acute would lift.*6\.9 m of slab or sill/);
+    // By hand: 12 m wide, tan 30 = 0.5774: 6.9 m of sill at one edge, two wedges of 12 x 6.928 / 2 x 1.2 m thick.
+    expect(warnings.join(' ')).toMatch(/acute would lift.*6\.9 m of sill and slab/);
+    expect(lines.slice(0, -2)).toEqual(plain);
+    expect(lines.at(-2)!.quantity).toBeCloseTo(99.77, 2);
   });
+});
+
+it('size(concrete-box) stands its ends square where that is asked, and measures what closes the wedges', () => {
+  const asked = at({ skewDeg: 5, squareEnds: true });
+  expect(uplift(asked)).toBe(uplift(at({})));
+  expect(asked.figures).not.toHaveProperty('skewTorqueKNm');
+  expect(asked).not.toHaveProperty('skewPressKN');
+  expect(at({ skewDeg: 5 }).skewPressKN).toBeGreaterThan(0);
+  // By hand: 12 x 12 x tan 5 (0.0875) x 1.2 m of concrete, 100 kg of bars in a m3.
+  const [concrete, bars] = asked.lines.slice(-2);
+  expect(concrete!.quantity).toBeCloseTo(15.118, 2);
+  expect(bars!.quantity).toBeCloseTo(100 * concrete!.quantity, 9);
+  expect(asked.warnings.join(' ')).toMatch(
+    /Skew 5 degrees: all bearings stand square to the road\. .* measured/,
+  );
+  // On a square deck there is nothing to ask.
+  const { task: _asked, ...square } = at({ squareEnds: true });
+  const { task: _plain, ...plain } = at({});
+  expect(square).toEqual(plain);
 });
 
 describe('size(concrete-box) on a skew and a curve', () => {
