@@ -1,4 +1,4 @@
-import { carries, formModule } from '../forms/index.ts';
+import { carries, formModule, isWorthSquaring } from '../forms/index.ts';
 import {
   asMade,
   isOpen,
@@ -15,7 +15,7 @@ import { depthThatCarries } from './depthThatCarries.ts';
 import type { DepthTrial } from './leastCostDepth.ts';
 import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
-import { spansOf } from './askedTask.ts';
+import { skewOn, spansOf } from './askedTask.ts';
 import { depthsOf, mainUnit, trialAt, workOptionAt, type Worked } from './workOption.ts';
 
 /** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
@@ -67,14 +67,41 @@ function* atBestDepth(bench: Workbench, option: MadeOption, nearM: number): Work
 
 /**
  * The cheapest way of making an option as it is asked: with no more than was asked, or one of the variants of its form that
- * agree with that where it saves more than 1 %. Every variant is tried once; only for the best of them, where it promises
- * anything, the depth is sought again.
+ * agree with that where it saves more than 1 %; then on a skew, if that saves more than 1 % again, the same with its ends
+ * square to the road.
  */
 function* cheapestMade(bench: Workbench, plain: Made, asked: AskedVariant | undefined): Work<Made> {
-  const { form, method, units, depthM: typedM } = plain.option;
-  const main = mainUnit(units);
+  const { form, method, units } = plain.option;
+  const module = formModule(form);
+  const made = yield* cheaperOf(
+    bench,
+    plain,
+    module.variants?.(spansOf(mainUnit(units)), bench.site.deck, method) ?? [],
+    asked,
+  );
+  return yield* cheaperOf(bench, made, squaredOf(bench, made.option), asked);
+}
+
+/** The variant of an option with square ends, where its form leaves that choice and there is a skew worth speaking of. */
+function squaredOf({ site }: Workbench, { form, variant = {} }: MadeOption): Variant[] {
+  const { choices = [] } = formModule(form);
+  const { skewDeg = 0 } = skewOn(site);
+  return choices.includes('squareEnds') && isWorthSquaring(skewDeg) ? [{ ...variant, squareEnds: true }] : [];
+}
+
+/**
+ * An option as it is made, or by one of some variants that agree with what was asked. Every variant is tried once; only for
+ * the best of them, where it promises anything, the depth is sought again.
+ */
+function* cheaperOf(
+  bench: Workbench,
+  plain: Made,
+  variants: readonly Variant[],
+  asked: AskedVariant | undefined,
+): Work<Made> {
+  const { depthM: typedM } = plain.option;
   const tried: Made[] = [];
-  for (const variant of formModule(form).variants?.(spansOf(main), bench.site.deck, method) ?? []) {
+  for (const variant of variants) {
     const made = asMade(asked, variant);
     if (made === null) continue;
     const option: MadeOption = { ...plain.option, variant: made };

@@ -15,6 +15,7 @@ import spliced from '../../data/forms/spliced.json';
 import pretensioned from '../../data/forms/pretensioned.json';
 import slab from '../../data/forms/slab.json';
 import slabDeck from '../../data/forms/slab-deck.json';
+import skewEnds from '../../data/forms/skew-ends.json';
 import halfThrough from '../../data/forms/half-through.json';
 import steelBox from '../../data/forms/steel-box.json';
 import truss from '../../data/forms/truss.json';
@@ -57,6 +58,7 @@ const files: Readonly<Record<string, unknown>> = {
   spliced,
   'precast-trough': precastTrough,
   'adjacent-box': adjacentBox,
+  'skew-ends': skewEnds,
   'half-through': halfThrough,
   'steel-box': steelBox,
   truss,

@@ -1,5 +1,6 @@
 import { described, type At, type Descriptor } from '../model/index.ts';
 import { depthWindow } from '../rules/figures.ts';
+import { squareEndFigures } from './common/squareEnds.ts';
 import { variantFigures } from './variantFigures.ts';
 
 const kept = (at: At): number => at.study.options.kept.findIndex(({ number }) => number === at.option.number);
@@ -44,6 +45,7 @@ const figureWords = (id: string): string =>
 /** What a unit is sized for, and what every form reports of it. What only one form reports stands beside that form. */
 export const designFigures: readonly Descriptor[] = [
   ...variantFigures,
+  ...squareEndFigures,
   described({
     path: unit('task/spansM/:i'),
     label: (at) => `span ${at.index('i') + 1}${name(at)}`,
@@ -230,6 +232,18 @@ export const designFigures: readonly Descriptor[] = [
       depth: `${at.unit}/task/depthM`,
     }),
     sources: ['AASHTO LRFD 4.6.2.2.3c (from memory)'],
+  }),
+  described({
+    path: unit('skewPressKN'),
+    label: (at) => `what skew ends press on all bearings of an end${name(at)}`,
+    unit: 'kN',
+    method: 'product',
+    formula: 'bearings under the boxes x what skew ends shift to the obtuse one of them',
+    inputs: (at) => ({
+      boxes: at.design.figures['boxes'] === undefined ? [] : [`${at.unit}/figures/boxes`],
+      shifted: `${at.unit}/figures/skewBearingKN`,
+    }),
+    compute: ({ boxes, shifted }) => 2 * (boxes[0] ?? 1) * shifted,
   }),
   described({
     path: unit('reactions/:s/:field'),

@@ -15,6 +15,7 @@ import { steelBox } from './steel-box/index.ts';
 import { truss } from './truss/index.ts';
 
 export { cannotCarry, carries } from './common/carries.ts';
+export { isWorthSquaring } from './common/squareEnds.ts';
 export { supportUpliftKN } from './common/supportUplift.ts';
 export type { FormModule, Pattern } from './formModule.ts';
 

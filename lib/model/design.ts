@@ -28,6 +28,8 @@ export interface UnitTask {
   readonly struts?: true;
   /** Concrete boxes: ribs across the deck under the slab, so that fewer cells carry it. */
   readonly ribs?: true;
+  /** Boxes on a skew: ends square to the road; along the skew when absent, where no bearing lifts there. */
+  readonly squareEnds?: true;
   /** Concrete boxes: between the axes of the outer webs at the top, m; in a fixed proportion to the deck when absent. */
   readonly boxWidthM?: number;
   /** Concrete boxes: cylinder strength of the concrete, MPa; the usual one of the standard when absent. */
@@ -194,6 +196,11 @@ export interface Design {
   readonly reactions: readonly SupportReaction[];
   /** What traffic puts on the bearing at an obtuse corner over that of a square deck, above 1; absent on a square deck and where the form has no figure for it. */
   readonly obtuseCorner?: number;
+  /**
+   * What skew ends press on the bearings of an end or of the pier next to it where all of them are made like the one at the
+   * obtuse corner, kN, design; absent where ends are square or do not twist the deck.
+   */
+  readonly skewPressKN?: number;
   /** Walls in one with the deck; absent where it rests on bearings. */
   readonly walls?: readonly IntegralWall[];
   /** Piers in one with the deck; absent where it rests on bearings. */

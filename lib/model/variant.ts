@@ -18,6 +18,8 @@ export interface Variant {
   readonly struts?: true;
   /** Ribs across the deck under the slab of a concrete box, so that fewer cells carry it. */
   readonly ribs?: true;
+  /** Ends of a box square to the road on skew abutments, where its bearings do not twist it; along them when absent, if none of them lifts. */
+  readonly squareEnds?: true;
   /** Width of a concrete box between the axes of its outer webs at the top, m. */
   readonly boxWidthM?: number;
   /** Cylinder strength of the concrete of a box, MPa. */
@@ -31,7 +33,14 @@ export interface Variant {
 }
 
 /** Choices of a variant that the search makes itself where nobody has; the others are as the form finds best until they are asked for. */
-export const searchedChoices = ['haunchRatio', 'substringers', 'transverse', 'struts', 'ribs'] as const;
+export const searchedChoices = [
+  'haunchRatio',
+  'substringers',
+  'transverse',
+  'struts',
+  'ribs',
+  'squareEnds',
+] as const;
 type SearchedChoice = (typeof searchedChoices)[number];
 
 /** How the main unit of an option is asked to be made: absent = without, 'unknown' = whichever costs least, or what is usual. */

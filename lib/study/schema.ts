@@ -200,6 +200,7 @@ const variant = z.strictObject({
   transverse: made,
   struts: made,
   ribs: made,
+  squareEnds: made,
   boxWidthM: width.exactOptional(),
   strengthMPa: z.number().positive().max(500).exactOptional(),
   light: z

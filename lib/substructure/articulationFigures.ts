@@ -45,6 +45,16 @@ const vesselsAt = (at: At): { readonly tonnes: string[]; readonly speeds: string
   };
 };
 
+/** What skew ends press on the bearings of a support, of every unit that rests here with an end span. */
+const skewPresses = (at: At): string[] =>
+  at.support.articulation.bearings === 0
+    ? []
+    : unitsAt(at).flatMap(({ unit, path, s }) => {
+        const { skewPressKN, task } = at.option.designs[unit]!;
+        const isOfEndSpan = s <= 1 || s >= task.spansM.length - 1;
+        return skewPressKN === undefined || !isOfEndSpan ? [] : [`${path}/skewPressKN`];
+      });
+
 /** How the deck is held at a support. */
 export const articulationFigures: readonly Descriptor[] = [
   described({
@@ -152,18 +162,22 @@ export const articulationFigures: readonly Descriptor[] = [
     unit: 'MN',
     method: 'factored sum',
     formula:
-      '(gamma G x permanent + gamma Q x traffic x obtuse corner) / 1000: on a skew all bearings are made like the one there',
+      '(gamma G x permanent + gamma Q x traffic x obtuse corner) / 1000, or without the corner and with what skew ends press, if that is more: on a skew all bearings are made like the one there',
     inputs: (at) => ({
       permanent: `${at.foot}/permanentKN`,
       traffic: `${at.foot}/trafficKN`,
       corners: unitsAt(at).flatMap(({ unit, path }) =>
         at.option.designs[unit]!.obtuseCorner === undefined ? [] : [`${path}/obtuseCorner`],
       ),
+      twists: skewPresses(at),
       gammaG: factor('permanent'),
       gammaQ: factor('traffic'),
     }),
-    compute: (v) =>
-      Math.max(0, v.gammaG * v.permanent + v.gammaQ * Math.max(1, ...v.corners) * v.traffic) / 1000,
+    compute: (v) => {
+      const design = (corner: number): number =>
+        Math.max(0, v.gammaG * v.permanent + v.gammaQ * corner * v.traffic);
+      return Math.max(design(Math.max(1, ...v.corners)), design(1) + sum(v.twists)) / 1000;
+    },
   }),
   described({
     path: support('articulation/acrossKN'),

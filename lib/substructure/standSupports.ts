@@ -79,6 +79,11 @@ function builtFrom(
   return { momentKNm, verticalKN: Math.max(0, permanentKN - site.deck.superimposedKNm * tributaryM) };
 }
 
+/** What skew ends press on the bearings of a support: of an end span, which alone is twisted. */
+function skewPressOn({ skewPressKN = 0, task }: Design, at: number): number {
+  return at <= 1 || at >= task.spansM.length - 1 ? skewPressKN : 0;
+}
+
 /** An abutment with the deck cast into it. */
 const withoutJoint = (ask: SupportAsk): SupportAsk => ({
   ...ask,
@@ -101,6 +106,7 @@ function askAt(
   const reaction = (key: 'permanentKN' | 'trafficMaxKN' | 'trafficMinKN'): number =>
     meetings.reduce((sum, { design, at }) => sum + design.reactions[at]![key], 0);
   const corners = meetings.flatMap(({ design: { obtuseCorner } }) => obtuseCorner ?? []);
+  const skewPressKN = meetings.reduce((sum, { design, at }) => sum + skewPressOn(design, at), 0);
   const carrier = meetings.find(({ design, at }) => design.task.pylons?.includes(at));
   const pylon = carrier ? { pylon: pylonFoot(carrier.design, roadLevelM - groundAt(site, chainageM)) } : {};
   const integral = meetings
@@ -126,6 +132,7 @@ function askAt(
     soffitLevelM: roadLevelM - constructionDepth(site.deck, deepest),
     ...loads,
     ...(corners.length > 0 ? { obtuseCorner: Math.max(...corners) } : {}),
+    ...(skewPressKN > 0 ? { skewPressKN } : {}),
     // Fixed points of two units add; sliding bearings of two units push apart, so the larger counts.
     alongKN: integral
       ? Math.max(...integral.loads.map(({ alongKN, struck }) => (struck ? 0 : Math.abs(alongKN))))

@@ -17,6 +17,8 @@ export interface SupportAsk {
   readonly trafficKN: number;
   /** What traffic puts on the bearing at an obtuse corner over that of a square deck; 1 when absent. */
   readonly obtuseCorner?: number;
+  /** What skew ends press on its bearings, all made like the one at the obtuse corner, kN, design; none when absent. */
+  readonly skewPressKN?: number;
   /** Least traffic reaction; negative = uplift. */
   readonly trafficLeastKN: number;
   /** While its arms stand free: moment of one arm ahead of the other, kNm, and what it carries then, kN. */

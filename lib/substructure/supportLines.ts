@@ -9,9 +9,15 @@ export function designLoadMN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficKN'>)
   return Math.max(0, permanent * ask.permanentKN + traffic * ask.trafficKN) / 1000;
 }
 
-/** Design load of the bearings of a support, MN: on a skew all are made like the one at the obtuse corner. */
-const bearingLoadMN = (ask: Pick<SupportAsk, 'permanentKN' | 'trafficKN' | 'obtuseCorner'>): number =>
-  designLoadMN({ ...ask, trafficKN: (ask.obtuseCorner ?? 1) * ask.trafficKN });
+/**
+ * Design load of the bearings of a support, MN: on a skew all are made like the one at the obtuse corner, by the published
+ * factor on traffic or by the twist of the skew ends, whichever asks for more: they tell of the same shift.
+ */
+function bearingLoadMN(ask: SupportAsk): number {
+  const cornerMN = designLoadMN({ ...ask, trafficKN: (ask.obtuseCorner ?? 1) * ask.trafficKN });
+  const pressKN = ask.bearings > 0 ? (ask.skewPressKN ?? 0) : 0;
+  return Math.max(cornerMN, designLoadMN(ask) + pressKN / 1000);
+}
 
 /** Design uplift, kN, 0 where the support stays pressed: 0.95 of the permanent load against the factored least traffic. */
 export function upliftKN(ask: Pick<SupportAsk, 'permanentKN' | 'trafficLeastKN'>): number {

@@ -54,10 +54,10 @@ export interface FormChoice {
   readonly without?: string;
 }
 
-const way = (label: string, words: string, without: string): FormChoice => ({
+const way = (label: string, words: string, without?: string): FormChoice => ({
   fields: [{ kind: 'way', label }],
   said: () => words,
-  without,
+  ...(without === undefined ? {} : { without }),
 });
 
 /** The choices that a form may leave, in the order in which they are asked. */
@@ -166,6 +166,8 @@ export const formChoices: Readonly<Record<keyof Variant, FormChoice>> = {
     ],
     said: ({ ballastKNm = [] }) => (ballastKNm.some((kNm) => kNm > 0) ? 'ballast in its cells' : null),
   },
+  // Nothing is said of ends that are not: most decks have no skew.
+  squareEnds: way('ends square to the road on a skew', 'ends square to the road'),
   castInPiers: {
     fields: [
       {

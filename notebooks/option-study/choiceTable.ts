@@ -148,7 +148,7 @@ export function choiceTable(graph: Graph, store: StudyStore, { reference }: Stud
   function build(study: Study, fields: Fields): HtmlChild {
     const first = inHand(study);
     if (first === null) return null;
-    const choices = choicesOf(first.form);
+    const choices = rowsOf(study, first);
     if (choices.length === 0) return null;
     const option = (): AppraisedOption => {
       const held = now();
@@ -213,11 +213,20 @@ export function choiceTable(graph: Graph, store: StudyStore, { reference }: Stud
     shape(study) {
       const option = inHand(study);
       if (option === null) return null;
-      const fields = choicesOf(option.form).map((key) => shownFields(study, option, key).length);
+      const fields = rowsOf(study, option).map((key) => shownFields(study, option, key).length);
       return [option.number, option.form, placeOf(study, option), spanNames(option), fields];
     },
     build,
   }).element;
+}
+
+/** Choices that are given a row: whether ends stand square is no question without a skew, unless it has been answered. */
+function rowsOf(study: Study, option: AppraisedOption): (keyof Variant)[] {
+  const { skewDeg } = study.brief.crossing;
+  const isSkew = typeof skewDeg === 'number' && skewDeg !== 0;
+  return choicesOf(option.form).filter(
+    (key) => key !== 'squareEnds' || isSkew || wayOf(study, option, key) !== 'unknown',
+  );
 }
 
 /** Fields of a choice: the first, and the others once that is made. */

@@ -172,6 +172,57 @@ describe('workOption(option of which some ways of making are open)', () => {
   });
 });
 
+describe('workOption(box on a skew)', () => {
+  const onSkew = (skewDeg: number): Workbench => {
+    const study = channel(2, 90);
+    return workbench({
+      ...study,
+      brief: { ...study.brief, crossing: { ...study.brief.crossing, skewDeg } },
+    });
+  };
+  const { units, ...rest } = optionOn(90);
+  const arms = (variant?: AskedVariant): Option => ({
+    ...rest,
+    form: 'cantilever-box',
+    method: 'balanced-cantilever',
+    units: units.map((unit) => ({ ...unit, form: 'cantilever-box' as const })),
+    ...(variant && { variant }),
+  });
+  const costOf = (bench: Workbench, variant?: AskedVariant) => {
+    const { option } = finish(workOption(bench, arms(variant)));
+    const foundations = option.supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
+    return { option, cost: bench.costOf([...option.lines, ...foundations]) };
+  };
+
+  it('takes its ends square where that saves more than a hundredth, sills and all', () => {
+    const bench = onSkew(10);
+    const open = costOf(bench);
+    const along = costOf(bench, {});
+    expect(along.option.designs[0]!.figures['skewTorqueKNm']).toBeGreaterThan(0);
+    expect(open.option.variant).toEqual({ squareEnds: true });
+    expect(open.cost).toBeLessThan(0.99 * along.cost);
+    const [design] = open.option.designs;
+    expect(design!.task).toMatchObject({ squareEnds: true, skewDeg: 10 });
+    expect(design!.figures).not.toHaveProperty('skewTorqueKNm');
+    expect(design!.lines.some(({ what }) => what === 'sills beyond square ends')).toBe(true);
+    expect(costOf(bench, { squareEnds: true }).cost).toBeCloseTo(open.cost, 6);
+  });
+
+  it('does not even try on a square deck, nor on a hardly skewed one', () => {
+    const squareAt = (skewDeg: number): boolean => {
+      const bench = onSkew(skewDeg);
+      let tried = false;
+      const size: Workbench['size'] = (task) => {
+        tried ||= task.squareEnds === true;
+        return bench.size(task);
+      };
+      finish(workOption({ ...bench, size }, arms()));
+      return tried;
+    };
+    expect([0, 0.9, 1.1].map(squareAt)).toEqual([false, false, true]);
+  });
+});
+
 describe('workOption(variant that was chosen)', () => {
   it('keeps to it, in depth, drawing and price', () => {
     const bench = workbench(channel(2, 60));

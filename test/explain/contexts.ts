@@ -192,6 +192,7 @@ export const variants = (): Context =>
       'composite-i': 'crane',
       'concrete-box': 'falsework',
       'cantilever-box': 'balanced-cantilever',
+      'composite-box': 'crane',
     } as const;
     const kept = (
       number: number,
@@ -223,7 +224,7 @@ export const variants = (): Context =>
       options: {
         ...options,
         forms: ['composite-i'],
-        workOutAnyway: ['composite-i', 'concrete-box', 'cantilever-box'],
+        workOutAnyway: ['composite-i', 'composite-box', 'concrete-box', 'cantilever-box'],
         kept: [
           kept(40, 'composite-i', { haunchRatio: 1.6, substringers: true }),
           kept(47, 'composite-i', { haunchRatio: 'unknown', substringers: true }),
@@ -238,6 +239,8 @@ export const variants = (): Context =>
             ballastKNm: [20, 0, 30],
           }),
           { ...kept(48, 'cantilever-box', { castInPiers: 2 }), depthM: 3 },
+          kept(49, 'composite-box', { squareEnds: true }),
+          kept(50, 'composite-box', {}),
           // Arms longer than the end spans balance, held down by them and what is laid in them.
           kept(39, 'cantilever-box', { ballastKNm: [60, 0, 60] }, 0.22),
         ],

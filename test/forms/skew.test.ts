@@ -36,7 +36,7 @@ describe.each(units)('size(%s) of a skew deck', (form, spansM, depthM) => {
 
   it('carries more shear: more of what resists it, or more of its strength used', () => {
     // Beyond that a box takes its ends square, and says so.
-    const skews = form === 'concrete-box' ? [0, 5, 10, 15] : [0, 20, 40, 60];
+    const skews = form.endsWith('-box') && form !== 'adjacent-box' ? [0, 5, 10, 15] : [0, 20, 40, 60];
     const all = skews.map((skewDeg) => sized(form, spansM, depthM, { skewDeg }));
     for (let i = 1; i < all.length; i++) {
       const [before, after] = [all[i - 1]!, all[i]!];

@@ -272,6 +272,7 @@ describe('choices of a form, asked of an option', () => {
       'strengthMPa',
       'light',
       'ballastKNm',
+      'squareEnds',
     ]);
     expect(choicesOf('composite-i')).toEqual(['haunchRatio', 'substringers']);
     expect(choicesOf('cantilever-box')).toEqual([...choicesOf('concrete-box'), 'castInPiers']);
@@ -287,6 +288,7 @@ describe('choices of a form, asked of an option', () => {
       transverse: 'unknown',
       struts: 'unknown',
       ribs: 'unknown',
+      squareEnds: 'unknown',
     });
     const read = readStudy(writeStudy(wide));
     expect(read.ok && read.value.options.kept).toEqual(wide.options.kept);
@@ -305,7 +307,7 @@ describe('choices of a form, asked of an option', () => {
     expect(wayOf(both, box, 'ribs')).toBe('without');
     expect(askedWords(both.options.kept[0]!)).toEqual(['box 6.00 m wide between its webs', 'no ribs']);
     const one = withAskedFigure(both, box, width, 'unknown');
-    expect(variantIn(one)).toEqual({ transverse: 'unknown', struts: 'unknown' });
+    expect(variantIn(one)).toEqual({ transverse: 'unknown', struts: 'unknown', squareEnds: 'unknown' });
     expect(variantIn(withWay(one, box, 'ribs', 'unknown'))).toBeUndefined();
     expect(withWay(study, box, 'ribs', 'unknown')).toBe(study);
     expect(withAskedFigure(study, box, width, 'unknown')).toBe(study);

@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import type { MeasuredLine, Site, Support } from '../../lib/model/index.ts';
+import type { Design, MeasuredLine, Site, Support } from '../../lib/model/index.ts';
 import { alongSupportsM } from '../../lib/site/index.ts';
 import { expectedLines, standSupports } from '../../lib/substructure/index.ts';
 import { wingsOf } from '../../lib/substructure/wings.ts';
@@ -71,6 +71,19 @@ it('standSupports(obtuse corner 1.2) prices bearings for 1.2 of their traffic an
   expect(sum([corner!], 'bearing')).toBeGreaterThan(sum([square!], 'bearing'));
   expect(corner!.shaft).toEqual(square!.shaft);
   expect(corner!.foundations).toEqual(square!.foundations);
+});
+
+it('standSupports(skew ends) presses the bearings of the end spans, where that is more than the factor of the corner', () => {
+  const units = [unitOn([0, 60, 140, 220, 280])];
+  const plain = plainDesign([60, 80, 80, 60]);
+  const load = (more: Partial<Design>): number[] =>
+    standSupports(dry, units, [{ ...plain, ...more }], profile).map((one) => one.articulation.bearingMN);
+  const square = load({});
+  const pressed = load({ skewPressKN: 2000 });
+  // Both ends and the piers next to them; nothing over the pier in the middle.
+  pressed.forEach((mn, j) => expect(mn - square[j]!).toBeCloseTo(j === 2 ? 0 : 2, 9));
+  expect(load({ skewPressKN: 2000, obtuseCorner: 1.001 })[0]).toBe(pressed[0]);
+  expect(load({ skewPressKN: 1, obtuseCorner: 1.2 })).toEqual(load({ obtuseCorner: 1.2 }));
 });
 
 it('standSupports(skew) widens the head over two columns by 1 / cos', () => {

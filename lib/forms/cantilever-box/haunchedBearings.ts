@@ -1,5 +1,6 @@
 import type { Check, SupportReaction } from '../../model/index.ts';
-import { bearingChecks, bearingsApart, skewTurnings } from '../concrete-box/boxBearings.ts';
+import { skewTurnings } from '../common/skewTurning.ts';
+import { bearingChecks, bearingsApart } from '../concrete-box/boxBearings.ts';
 import type { CantileverModel } from './cantileverModel.ts';
 import { haunchedSkew } from './haunchedSkew.ts';
 import type { SizedHaunched } from './sizeHaunched.ts';

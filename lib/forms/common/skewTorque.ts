@@ -67,6 +67,23 @@ export const noSkew = (spansM: readonly number[]): SkewTorques => {
   return { lastingKNm: none, trafficKNm: none };
 };
 
+/**
+ * Greatest design torque of skew ends, kNm: what lasts relieves no traffic.
+ * @param factors partial factors of lasting loads and of traffic
+ */
+export const skewDesignKNm = (
+  { lastingKNm, trafficKNm }: SkewTorques,
+  factors: { readonly lasting: number; readonly traffic: number },
+): number =>
+  Math.max(
+    ...lastingKNm.map((lasting, span) =>
+      Math.max(
+        factors.lasting * Math.abs(lasting),
+        factors.lasting * Math.max(0, lasting) + factors.traffic * trafficKNm[span]!,
+      ),
+    ),
+  );
+
 /** Of a uniform load on an end span its end takes this much where the far end is held: what traffic presses a skew end by. */
 export const END_SHARE = 3 / 8;
 

@@ -1,3 +1,5 @@
+import { skewFigures } from '../common/skewEnds.ts';
+import { skewDesignKNm, type SkewTorques } from '../common/skewTorque.ts';
 import { elementsPerSpan } from '../composite-i/elementsPerSpan.ts';
 import { girderFigures, type GirderFigures } from '../composite-i/girderSection.ts';
 import { platesAt } from '../composite-i/plateRun.ts';
@@ -5,20 +7,17 @@ import type { SizedGirder } from '../composite-i/sizeGirder.ts';
 import { totalHog, totalSag } from '../composite-i/stageMoments.ts';
 import type { BoxGirderModel } from './boxGirderModel.ts';
 import type { BoxSteel } from './boxSteel.ts';
-import { tubConstants } from './tubTorsion.ts';
+import { bearingPerKNm } from './tubBearings.ts';
+import { shearRatioOf, tubConstants } from './tubTorsion.ts';
 
 const work: GirderFigures = { areaM2: 0, centroidM: 0, inertiaM4: 0 };
-
-/** Shear modulus of steel over that of concrete, for the ratio of their moduli: Poisson's ratio 0.3 and 0.2. */
-function shearRatioOf(modularRatio: number): number {
-  return (modularRatio * 1.2) / 1.3;
-}
 
 /** Named figures of the boxes: layout, plates, statics of half a box, torsion of a whole one. */
 export function boxGirderFigures(
   model: BoxGirderModel,
   girder: SizedGirder,
   steel: BoxSteel,
+  skew: SkewTorques,
 ): Record<string, number> {
   const { tubs, shape, torsion, field, task, lengthM } = model;
   const { spansM } = task;
@@ -59,6 +58,13 @@ export function boxGirderFigures(
     closedOverOpen: constants.closedM4 / constants.openM4,
     torqueDesignKNm: torsion.mostKNm,
     curveTorqueKNm: torsion.curveKNm,
+    ...skewFigures(
+      skewDesignKNm(skew, {
+        lasting: model.standard.factors.uls.superimposed,
+        traffic: model.standard.factors.uls.traffic,
+      }),
+      1 / bearingPerKNm(model),
+    ),
     halfVehicles: model.traffic.vehicleFactor,
     halfUniformKNm: model.traffic.udlKNm,
     steelKgM2: (plateKg + steel.totalKg) / areaM2,

@@ -93,9 +93,10 @@ export const boxGirderCheckFigures: readonly Descriptor[] = [
   ...check(
     'bearing-uplift',
     [
-      'torque of eccentric traffic and of the curve by the distance of the bearings, less the least load that makes it',
+      'torque of eccentric traffic, of the curve and of skew ends by the distance of the bearings, less the least load that makes it',
       'torqueDesignKNm',
       'curveTorqueKNm',
+      './task/skewDeg?',
       'bottomPlateWidthM',
       'data/composite-box/bearings/fromWebsM',
     ],

@@ -3,6 +3,7 @@ import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
 import { obtuseOf } from '../common/obtuse.ts';
+import { withSkewEnds } from '../common/skewEnds.ts';
 import { overLimit } from '../common/warnings.ts';
 import { heaviestPiece } from '../composite-i/girderChecks.ts';
 import { girderElevation } from '../composite-i/girderDrawing.ts';
@@ -15,6 +16,7 @@ import { boxGirderSections } from './boxGirderDrawing.ts';
 import { boxGirderLines } from './boxGirderLines.ts';
 import { boxGirderModel } from './boxGirderModel.ts';
 import { boxGirderFigures } from './boxGirderReport.ts';
+import { boxGirderSkew } from './boxGirderSkew.ts';
 import { boxSteelOf } from './boxSteel.ts';
 
 /** How far webs lean, of the most they may; the first is preferred. */
@@ -31,7 +33,8 @@ export const compositeBox: FormModule = {
   name: 'Composite box girders',
   pattern: { kind: 'continuous' },
   methods: ['crane'],
-  size,
+  choices: ['squareEnds'],
+  size: (task) => withSkewEnds(task, size),
 };
 
 /** @throws RangeError for spans, depth or widths that are not possible */
@@ -54,7 +57,8 @@ function sizeWith(task: UnitTask, lean: number): Design {
   const girder = sizeGirder(model, steelOf);
   const steel = steelOf(model, girder.run, girder.effects, girder.plateKg);
   const reactions = girderReactions(model, girder);
-  const checks = boxGirderChecks(model, girder, reactions);
+  const skew = boxGirderSkew(model, girder);
+  const checks = boxGirderChecks(model, girder, reactions, skew);
   const depthM = model.girderM + model.slab.rootM;
   const half = heaviestPiece(model, girder);
   return {
@@ -75,6 +79,6 @@ function sizeWith(task: UnitTask, lean: number): Design {
       massT: 2 * half.massT * (1 + steel.totalKg / girder.plateKg),
     },
     warnings: overLimit(checks, 'plates'),
-    figures: boxGirderFigures(model, girder, steel),
+    figures: boxGirderFigures(model, girder, steel, skew),
   };
 }

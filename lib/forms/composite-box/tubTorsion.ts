@@ -3,6 +3,10 @@ import { bredt, openTorsion, type Wall } from '../../mechanics/index.ts';
 import type { UnitTask } from '../../model/index.ts';
 import type { TubLayout, TubShape } from './tubShape.ts';
 
+/** Poisson's ratios (EN 1993-1-1 3.2.6, EN 1992-1-1 3.1.3 uncracked, from memory). */
+export const steelPoisson = 0.3;
+const concretePoisson = 0.2;
+
 /** Torsion of one box by its closed walls. */
 export interface TubTorsion {
   readonly enclosedM2: number;
@@ -21,6 +25,11 @@ export interface TubTorsion {
 /** Area enclosed by the middle lines: trapezoid from the bottom plate to the middle of the slab, m2. */
 export function enclosedArea(shape: TubShape, slabM: number): number {
   return ((shape.topM + shape.bottomM) / 2) * (shape.heightM + slabM / 2);
+}
+
+/** Shear modulus of steel over that of concrete, for the ratio of their moduli: Poisson's ratio 0.3 and 0.2. */
+export function shearRatioOf(modularRatio: number): number {
+  return (modularRatio * (1 + concretePoisson)) / (1 + steelPoisson);
 }
 
 /** Walls of the closed box in steel: slab by its shear modulus, two webs, bottom plate. */

@@ -23,6 +23,8 @@ export interface GirderEffects {
   /** Parasitic moments of shrinkage, and of a slab warmer than the steel by one kelvin. */
   readonly shrinkage: Effects;
   readonly warmth: Effects;
+  /** Curvature of the girder as its uncracked slab shrinks, 1/m at the stations, sagging positive. */
+  readonly shrunk1PerM: Float64Array;
   readonly traffic: TrafficEnvelope;
   /** Composite beam for short loads, for influence lines. */
   readonly shortBeam: LineBeam;
@@ -63,6 +65,7 @@ export function girderEffects(
     superimposed: uniform(lastingBeam, model.superimposedKNm),
     shrinkage: spansM.length > 1 ? imposedCurvature(lastingBeam, shrinkage) : uniform(lastingBeam, 0),
     warmth: spansM.length > 1 ? imposedCurvature(shortBeam, warmth) : uniform(shortBeam, 0),
+    shrunk1PerM: shrinkage,
     traffic: known ?? trafficEnvelope(shortBeam, model.traffic, { deflection: false }),
     shortBeam,
     steelKg,

@@ -1,7 +1,7 @@
 import { trafficTorsion } from '../../actions/index.ts';
 import type { Check, SupportReaction } from '../../model/index.ts';
 import { check } from '../common/checks.ts';
-import { atSupports, END_SHARE, type SkewTorques } from '../common/skewTorque.ts';
+import { noTwist, skewCases, type SkewTurning } from '../common/skewTurning.ts';
 import { supportUpliftKN } from '../common/supportUplift.ts';
 import { curveTorque } from '../composite-box/tubTorsion.ts';
 import { boxData } from './boxData.ts';
@@ -20,18 +20,6 @@ export interface Turning {
   /** Torque of skew ends, either way; none where it is absent. */
   readonly skew?: SkewTurning;
 }
-
-/**
- * Torque of skew ends at a support, kNm, of lasting loads (negative where they turn it the other way than traffic does) and
- * of traffic, and the least that this traffic presses, kN.
- */
-export interface SkewTurning {
-  readonly lastingKNm: number;
-  readonly trafficKNm: number;
-  readonly pressKN: number;
-}
-
-const noTwist: SkewTurning = { lastingKNm: 0, trafficKNm: 0, pressKN: 0 };
 
 /** A deck that stands on two bearings at some or all of its supports. */
 export interface OnBearings {
@@ -76,25 +64,6 @@ export function curveAtSupports(
     at[span + 1]! -= torque[torque.length - 1]!;
   });
   return at;
-}
-
-/** What skew ends bring to each support; a uniform load stands on the shorter of the spans beside it at least. */
-export function skewTurnings(
-  { lastingKNm, trafficKNm }: SkewTorques,
-  spansM: readonly number[],
-  udlKNm: number,
-): SkewTurning[] {
-  const lasting = atSupports(lastingKNm);
-  return atSupports(trafficKNm).map((traffic, j) => {
-    const beside = [lastingKNm[j - 1] ?? 0, lastingKNm[j] ?? 0];
-    const worst = beside.reduce((a, b) => (Math.abs(b) > Math.abs(a) ? b : a));
-    return {
-      lastingKNm: worst < 0 ? -lasting[j]! : lasting[j]!,
-      trafficKNm: traffic,
-      pressKN:
-        traffic > 0 ? END_SHARE * udlKNm * Math.min(spansM[j - 1] ?? Infinity, spansM[j] ?? Infinity) : 0,
-    };
-  });
 }
 
 /** Turning of each support, vehicles of the heaviest row all over it and uniform loads on half of either span. */
@@ -145,8 +114,8 @@ function together(all: readonly Turning[], vehicleKNm: number, withVehicle: numb
 /**
  * Design moments about the bearings of one side, kNm: what turns the deck over them and what holds it. Traffic that makes
  * a torque presses at least so much that it stands no farther out than the outer lane, and a curve carries what it presses
- * as far out as the lasting load; traffic that twists skew ends presses them, and is away where what lasts twists them the
- * other way more. The worse of the two sides, with vehicles pushing outwards and without.
+ * as far out as the lasting load; traffic that twists skew ends presses them, and may be away. The worse of the two sides,
+ * with vehicles pushing outwards and without.
  */
 export function turnedOver(
   turning: Turning,
@@ -156,16 +125,8 @@ export function turnedOver(
 ): { readonly overKNm: number; readonly heldKNm: number } {
   const { lastingKN, outwardKNm, trafficKNm, besidePushKNm, pushKNm } = turning;
   const { skew = noTwist } = turning;
-  // What lasts relieves nothing that traffic twists: it is the rest of two great moments, that of loads and of tendons.
-  const twists =
-    skew.lastingKNm < 0
-      ? [
-          { ...skew, lastingKNm: 0 },
-          { ...noTwist, lastingKNm: -skew.lastingKNm },
-        ]
-      : [skew];
   const offM = lastingKN > 0 ? outwardKNm / lastingKN : 0;
-  const cases = [1, -1].flatMap((side) => twists.map((twist) => ({ side, twist })));
+  const cases = [1, -1].flatMap((side) => skewCases(skew).map((twist) => ({ side, twist })));
   const sides = cases.map(({ side, twist }) => {
     const net = (torqueKNm: number): number =>
       torqueKNm +

@@ -1,5 +1,6 @@
 import type { SupportReaction } from '../../model/index.ts';
 import { skewFigures } from '../common/skewEnds.ts';
+import { skewDesignKNm } from '../common/skewTorque.ts';
 import type { SkewTorques } from '../common/skewTorque.ts';
 import { boxBars } from './boxBars.ts';
 import { strandKg } from './boxLines.ts';
@@ -7,7 +8,6 @@ import { bearingsApart } from './boxBearings.ts';
 import { madeFigures } from './boxConcrete.ts';
 import type { BoxLayout } from './boxLayout.ts';
 import type { BoxModel } from './boxModel.ts';
-import { boxSkewKNm } from './boxSkew.ts';
 import { betweenZeros, workingWidthM } from './shearLag.ts';
 import type { SizedBox } from './sizeBox.ts';
 import type { Struts } from './struts.ts';
@@ -88,7 +88,13 @@ export function boxFigures(model: BoxModel, box: SizedBox, skew: SkewTorques): R
     pierInertiaM4: sections.pier.inertiaM4,
     enclosedAreaM2: box.shear.enclosedM2,
     bearingsApartM: apartM,
-    ...skewFigures(boxSkewKNm(model, skew), apartM),
+    ...skewFigures(
+      skewDesignKNm(skew, {
+        lasting: model.standard.factors.uls.permanent,
+        traffic: model.standard.factors.uls.traffic,
+      }),
+      apartM,
+    ),
     webTrafficShare: box.shear.webShare,
     tendonCount: tendons.group.tendonsPerWeb * layout.webs,
     strandsPerTendon: tendons.group.strandsPerTendon,

@@ -33,16 +33,3 @@ export function boxSkew(
     trafficKNm: skewTorques(deck, traffic.most.momentMaxKNm, skewDeg),
   };
 }
-
-/** Greatest design torque of skew ends, kNm. */
-export function boxSkewKNm(
-  { standard }: Pick<BoxModel, 'standard'>,
-  { lastingKNm, trafficKNm }: SkewTorques,
-): number {
-  const { permanent, traffic } = standard.factors.uls;
-  return Math.max(
-    ...lastingKNm.map((lasting, span) =>
-      Math.max(permanent * Math.abs(lasting), permanent * Math.max(0, lasting) + traffic * trafficKNm[span]!),
-    ),
-  );
-}

@@ -12,6 +12,7 @@ export const boxChoices = [
   'strengthMPa',
   'light',
   'ballastKNm',
+  'squareEnds',
 ] as const satisfies readonly (keyof Variant)[];
 
 /** Ways of making a concrete box besides a plain top slab: tendons across it, where they save a cell. */

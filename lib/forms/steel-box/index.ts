@@ -28,6 +28,7 @@ export const steelBox: FormModule = {
   alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.8] }],
   methods: ['balanced-cantilever', 'launch'],
   reads: ['haunch'],
+  choices: ['squareEnds'],
   size: (task) => withSkewEnds(task, size),
 };
 

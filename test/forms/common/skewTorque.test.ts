@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { atSupports, skewTorques } from '../../../lib/forms/common/skewTorque.ts';
+import { skewCases, skewTurnings } from '../../../lib/forms/common/skewTurning.ts';
 import { lineBeam, uniform } from '../../../lib/mechanics/index.ts';
 
 const stationsPerSpan = 100;
@@ -34,6 +35,21 @@ describe('skewTorques(deck, moments, skew)', () => {
     expect(inner).toBe(0);
   });
 
+  it('of a deck turned end for end are those of the other end', () => {
+    const { deck, momentKNm } = deckOf([30, 45, 38]);
+    const taper = deck.eiKNm2.map((ei, e) => ei * (1 + e / 100));
+    const turned = {
+      elementM: deck.elementM.toReversed(),
+      eiKNm2: taper.toReversed(),
+      gjKNm2: deck.gjKNm2,
+      supportAt: deck.supportAt,
+    };
+    const ahead = skewTorques({ ...deck, eiKNm2: taper }, momentKNm, 15);
+    const back = skewTorques(turned, momentKNm.toReversed(), 15);
+    back.toReversed().forEach((kNm, span) => expect(kNm).toBeCloseTo(ahead[span]!, 6));
+    expect(ahead[0]).not.toBeCloseTo(ahead[2]!, 0);
+  });
+
   it('is none on square supports, and stays finite where the skew is steep', () => {
     const { deck, momentKNm } = deckOf([40, 40, 40]);
     expect(skewTorques(deck, momentKNm, 0)).toEqual([0, 0, 0]);
@@ -45,4 +61,28 @@ it('atSupports(torques) are what changes there: nothing at the middle pier of tw
   expect(atSupports([500, 500])).toEqual([500, 0, 500]);
   expect(atSupports([500, 0, 400])).toEqual([500, 500, 400, 400]);
   expect(atSupports([500])).toEqual([500, 500]);
+});
+
+describe('skewTurnings(torques, spans, load) and its cases', () => {
+  it('press by three eighths of the load on the shorter span beside, where traffic twists at all', () => {
+    const turnings = skewTurnings(
+      { lastingKNm: [-300, 0, 200], trafficKNm: [500, 0, 400] },
+      [30, 50, 40],
+      20,
+    );
+    // By hand: 3/8 x 20 x 30 = 225 kN, 3/8 x 20 x 40 = 300 kN.
+    expect(turnings).toEqual([
+      { lastingKNm: -300, trafficKNm: 500, pressKN: 225 },
+      { lastingKNm: -300, trafficKNm: 500, pressKN: 225 },
+      { lastingKNm: 200, trafficKNm: 400, pressKN: 300 },
+      { lastingKNm: 200, trafficKNm: 400, pressKN: 300 },
+    ]);
+  });
+
+  it('are the traffic that twists with what lasts the same way, and what lasts either way alone', () => {
+    const of = (lastingKNm: number) => skewCases({ lastingKNm, trafficKNm: 500, pressKN: 225 });
+    const alone = { lastingKNm: 300, trafficKNm: 0, pressKN: 0 };
+    expect(of(-300)).toEqual([{ lastingKNm: 0, trafficKNm: 500, pressKN: 225 }, alone]);
+    expect(of(300)).toEqual([{ lastingKNm: 300, trafficKNm: 500, pressKN: 225 }, alone]);
+  });
 });

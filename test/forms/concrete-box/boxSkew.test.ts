@@ -30,11 +30,51 @@ describe('size(concrete-box) on its bearings on a skew', () => {
   });
 
   it('takes its ends square where the acute bearing would lift, as square as a deck without a skew', () => {
-    const { task: _skew, warnings, ...skew } = at({ skewDeg: 30 });
-    const { task: _square, warnings: _none, ...square } = at({});
+    const { task: _skew, warnings, lines, ...skew } = at({ skewDeg: 30 });
+    const { task: _square, warnings: _none, lines: plain, ...square } = at({});
     expect(skew).toEqual(square);
-    // By hand: 12 m wide, tan 30 = 0.5774: 6.9 m of slab at one edge.
-    expect(warnings.join(' ')).toMatch(/acute would lift.*6\.9 m of slab or sill/);
+    // By hand: 12 m wide, tan 30 = 0.5774: 6.9 m of sill at one edge, two wedges of 12 x 6.928 / 2 x 1.2 m thick.
+    expect(warnings.join(' ')).toMatch(/acute would lift.*6\.9 m of sill and slab/);
+    expect(lines.slice(0, -2)).toEqual(plain);
+    expect(lines.at(-2)!.quantity).toBeCloseTo(99.77, 2);
+  });
+});
+
+it('size(concrete-box) stands its ends square where that is asked, and measures what closes the wedges', () => {
+  const asked = at({ skewDeg: 5, squareEnds: true });
+  expect(uplift(asked)).toBe(uplift(at({})));
+  expect(asked.figures).not.toHaveProperty('skewTorqueKNm');
+  expect(asked).not.toHaveProperty('skewPressKN');
+  expect(at({ skewDeg: 5 }).skewPressKN).toBeGreaterThan(0);
+  // By hand: 12 x 12 x tan 5 (0.0875) x 1.2 m of concrete, 100 kg of bars in a m3.
+  const [concrete, bars] = asked.lines.slice(-2);
+  expect(concrete!.quantity).toBeCloseTo(15.118, 2);
+  expect(bars!.quantity).toBeCloseTo(100 * concrete!.quantity, 9);
+  expect(asked.warnings.join(' ')).toMatch(
+    /Skew 5 degrees: all bearings stand square to the road\. .* measured/,
+  );
+  // On a square deck there is nothing to ask.
+  const { task: _asked, ...square } = at({ squareEnds: true });
+  const { task: _plain, ...plain } = at({});
+  expect(square).toEqual(plain);
+});
+
+describe('size(concrete-box) on a skew and a curve', () => {
+  const said = (asked: Partial<UnitTask>): string =>
+    at(asked).warnings.find((warning) => warning.startsWith('Skew'))!;
+
+  it('blames the skew where a bearing lifts with it and not without', () => {
+    expect(uplift(at({ planRadiusM: 150 }))).toBeLessThanOrEqual(1);
+    expect(said({ planRadiusM: 150, skewDeg: 10 })).toMatch(/the acute would lift.*tied down/);
+  });
+
+  it('blames the curve where a bearing lifts on square supports already, and sizes those', () => {
+    const square = at({ planRadiusM: 60 });
+    expect(uplift(square)).toBeGreaterThan(1);
+    expect(uplift(at({ planRadiusM: 60, skewDeg: 10 }))).toBe(uplift(square));
+    const words = said({ planRadiusM: 60, skewDeg: 10 });
+    expect(words).toMatch(/on square supports already, by eccentric traffic and the curve \(120 % /);
+    expect(words).not.toMatch(/acute|tied down/);
   });
 });
 
@@ -90,4 +130,7 @@ it('turnedOver(skew) takes what lasts the other way without the traffic that rel
   // By hand: with skew traffic 800 + 600 - 300 x 2 = 800 kNm x 1.35 = 1,080; without 800 - 200 x 2 = 400 x 1.35 = 540.
   expect(over(-400)).toBeCloseTo(1080, 9);
   expect(over(-900)).toBeCloseTo(900 + 540, 9);
+  // A slight twist presses more than it turns: 800 + 50 - 600 would be less than 400 without it.
+  const slight = { lastingKNm: 10, trafficKNm: 50, pressKN: 300 };
+  expect(turnedOver({ ...turning, skew: slight }, 4, 4, factors).overKNm).toBeCloseTo(10 + 540, 9);
 });

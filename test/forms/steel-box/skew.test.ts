@@ -30,8 +30,8 @@ describe('size(steel-box) of a skew deck', () => {
     expect(steelKg(skew)).toBe(steelKg(square));
     expect(uplift(skew)).toBe(uplift(square));
     expect(skew.task.skewDeg).toBe(45);
-    // By hand: 12 m wide, tan 45 = 1: 12.0 m of slab at one edge.
-    expect(skew.warnings.join(' ')).toMatch(/acute would lift.*12\.0 m of slab or sill/);
+    // By hand: 12 m wide, tan 45 = 1: 12.0 m of sill at one edge.
+    expect(skew.warnings.join(' ')).toMatch(/acute would lift.*12\.0 m of sill and slab/);
   });
 
   it('has the torque of a beam on skew supports in a single span', () => {
