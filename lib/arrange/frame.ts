@@ -1,4 +1,5 @@
 import type { CostTable, FormId, Site } from '../model/index.ts';
+import { deepestPlace } from '../site/index.ts';
 
 /** A stretch barred to supports, widened by half a pier, positions from the start of the frame. */
 export interface Barred {
@@ -26,6 +27,8 @@ export interface Frame {
   readonly barred: readonly Barred[];
   /** The barred stretch the main span goes over, or null. */
   readonly opening: Barred | null;
+  /** Where there is none it goes over the deepest place. */
+  readonly deepestM: number;
 }
 
 /** Positions closer than this are the same, m. */
@@ -109,7 +112,9 @@ function build(site: Site, pierHalfWidthM: number, mirrored: boolean): Frame {
   const opening =
     main === null ? null : (barred.find(({ fromM, toM }) => fromM < middle && toM > middle) ?? null);
   const ends = { startM, endM, lengthM, mirrored };
-  return { ...ends, X, chainageM: X.map((x) => chainageOf(ends, x)), soft, barred, opening };
+  const deepest = deepestPlace(site);
+  const [deepestM] = local(site, mirrored, deepest, deepest);
+  return { ...ends, deepestM, X, chainageM: X.map((x) => chainageOf(ends, x)), soft, barred, opening };
 }
 
 /** Chainage of a position, m, to the micrometre. */

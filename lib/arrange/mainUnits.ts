@@ -12,8 +12,6 @@ import type { ArrangeRequest } from './request.ts';
 import { sideRoom } from './sideRoom.ts';
 import { simpleCost, simpleLayouts } from './simpleMain.ts';
 
-/** Without a barred stretch and above this many positions the main span goes over the middle of the crossing. */
-const MANY = 700;
 /** Places tried on each side of the opening before the best are refined; edges of barred stretches come on top. */
 const PLACES = 64;
 
@@ -99,13 +97,8 @@ interface Ranges {
 }
 
 function rangesOf(frame: Frame, limits: Limits, reach: number): Ranges {
-  const { X, opening, lengthM } = frame;
-  const n = X.length;
-  if (opening === null && n <= MANY) {
-    const all = [0, n - 1] as const;
-    return { left: all, right: all, outerLeft: all, outerRight: all };
-  }
-  const { fromM, toM } = opening ?? { fromM: lengthM / 2, toM: lengthM / 2 };
+  const { X, opening, deepestM } = frame;
+  const { fromM, toM } = opening ?? { fromM: deepestM, toM: deepestM };
   const inner = limits.maxSpanM;
   const left = [firstAtLeast(X, toM - inner), lastAtMost(X, fromM)] as const;
   const right = [firstAtLeast(X, toM), lastAtMost(X, fromM + inner)] as const;
@@ -115,7 +108,7 @@ function rangesOf(frame: Frame, limits: Limits, reach: number): Ranges {
 }
 
 /**
- * Arrangements of a main unit over the opening with approach units where needed: the cheapest for each number of
+ * Arrangements of a main unit over the opening, or over the deepest place where nothing is barred, with approach units where needed: the cheapest for each number of
  * supports, number of pylons and metre of main span. Throws RangeError when the windows of the approach form are missing.
  */
 export function mainUnitCandidates(

@@ -1,3 +1,4 @@
+export { deepestPlace } from './deepestPlace.ts';
 export { addedFill } from './addedFill.ts';
 export { CROSSFALL, constructionDepth } from './constructionDepth.ts';
 export { deckSpec } from './deckSpec.ts';

@@ -26,6 +26,27 @@ function main(arrangement: Arrangement): Unit {
   return arrangement.units.find(({ role }) => role === 'main')!;
 }
 
+describe('arrange where nothing is barred', () => {
+  it.each([truss, stayed])('arrange($form) puts the main span over the deepest place', (request) => {
+    const level = demoSite(300);
+    const site = { ...level, groundX: [0, 60, 180, 220, 300], groundZ: [20, 12, 0, 0, 20] };
+    const { arrangements } = arrange(request, site, demoTable());
+    expect(arrangements.length).toBeGreaterThan(0);
+    for (const arrangement of arrangements) {
+      const { supportsM, pylons } = main(arrangement);
+      // Of one pylon the main span is the longer of the two beside it, of two that between them.
+      const [from, to] =
+        pylons === undefined
+          ? [supportsM[0]!, supportsM.at(-1)!]
+          : pylons.length === 2
+            ? pylons
+            : [supportsM[0]!, supportsM.at(-1)!];
+      expect(from!).toBeLessThanOrEqual(200);
+      expect(to!).toBeGreaterThanOrEqual(200);
+    }
+  });
+});
+
 describe('arrange on the worked example', () => {
   const site = survey(lowFerry().brief);
   const table = demoTable();
