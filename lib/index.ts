@@ -2,8 +2,8 @@
 export * from './model/index.ts';
 export { appraise, appraiseSteps } from './appraise.ts';
 export { conclude, optionsOf } from './appraise/conclude.ts';
+export { formsAsked, formsInParts } from './appraise/formsAsked.ts';
 export {
-  formsAsked,
   laySteps,
   proposeSteps,
   workOutSteps,

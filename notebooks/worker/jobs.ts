@@ -11,8 +11,13 @@ interface Part {
 
 /** What the workers of the notebook do; each takes a part of the same study. */
 export const jobs = {
-  /** Sizes a share of the rows of the cost tables. */
-  lay: ({ study, share }: Part & { readonly share: Share }): Steps<LaidRow[]> => laySteps(study, share, kept),
+  /** Sizes a share of the rows of the cost tables of some forms. */
+  lay: ({
+    study,
+    forms,
+    share,
+  }: Part & { readonly forms: readonly FormId[]; readonly share: Share }): Steps<LaidRow[]> =>
+    laySteps(study, forms, share, kept),
 
   /** Searches some forms, with the rows that all have sized together. */
   propose({
