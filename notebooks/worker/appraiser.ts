@@ -9,8 +9,9 @@ import type {
   Study,
 } from '../../lib/index.ts';
 import type { Progress, SlowRun } from '../reactive/index.ts';
-import { client, type Call, type Client } from './client.ts';
+import type { Call, Client } from './client.ts';
 import type { jobs } from './jobs.ts';
+import { startWorkers } from './startWorkers.ts';
 
 /** Appraises studies off the page's thread. */
 export interface Appraiser {
@@ -30,9 +31,6 @@ export interface Appraiser {
   /** Ends the workers; what they were working on rejects. */
   readonly end: () => void;
 }
-
-/** More workers than this have too little to do each. */
-const MOST = 4;
 
 /** Rounds of work that a part of the forms takes: rows of the cost tables, arrangements, options. */
 const ROUNDS = 3;
@@ -129,19 +127,10 @@ export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser
 }
 
 /**
- * Starts the workers: one processor is left to the page and to the compiler, without which two workers are slower than one.
- * Everything asked of them rejects once one has failed to load or they have been ended.
+ * Starts the workers. Everything asked of them rejects once one has failed to load or they have been ended.
  */
 export function appraiser(): Appraiser {
-  const count = Math.min(MOST, Math.max(1, navigator.hardwareConcurrency - 1));
-  const started = Array.from({ length: count }, () => {
-    const worker = new Worker(new URL('./appraise.worker.ts', import.meta.url), { type: 'module' });
-    const line = client<typeof jobs>(worker);
-    worker.addEventListener('error', (event) =>
-      line.close(new Error(`the worker stopped: ${event.message}`)),
-    );
-    return { worker, line };
-  });
+  const started = startWorkers();
   return {
     appraise: appraiseWith(started.map(({ line }) => line)),
     async workOut(study, options, run) {
@@ -156,10 +145,7 @@ export function appraiser(): Appraiser {
       for (const { line } of started) line.hold(isHeld);
     },
     end() {
-      for (const { worker, line } of started) {
-        worker.terminate();
-        line.close(new Error('the worker was ended'));
-      }
+      for (const one of started) one.end();
     },
   };
 }
