@@ -189,6 +189,6 @@ export function bracketKey({ children }: Piece): { readonly letter: string; read
     const letter = child.attrs['data-letter'];
     if (letter === undefined) return child.tag === 'g' || child.tag === 'svg' ? bracketKey(child) : [];
     const title = child.children.find((one): one is Piece => typeof one !== 'string' && one.tag === 'title');
-    return [{ letter, names: String(title?.children[0] ?? '') }];
+    return [{ letter, names: title?.children.filter((one) => typeof one === 'string').join('') ?? '' }];
   });
 }
