@@ -5,8 +5,13 @@ import { h, type HtmlChild } from '../html.ts';
 import { pushed, workedFigure } from '../page/index.ts';
 import { reachable, type ReachDesk, type Reaches, type Reaching } from './reachDesk.ts';
 
-const action = (words: string, name: string, key: string, act: () => void): HTMLElement =>
-  h('button', { type: 'button', class: 'action', 'data-key': key, 'aria-label': name, onclick: act }, words);
+/** An action, called by its words and what they are of. */
+const action = (words: string, of: string, key: string, act: () => void): HTMLElement =>
+  h(
+    'button',
+    { type: 'button', class: 'action', 'data-key': key, 'aria-label': `${words}: ${of}`, onclick: act },
+    words,
+  );
 
 /** What ends the spans of a form, and how deep and heavy it is there. */
 function reachCells(reach: FormReach): readonly HtmlChild[] {
@@ -30,8 +35,8 @@ function reachCells(reach: FormReach): readonly HtmlChild[] {
 
 function stateCells(desk: ReachDesk, form: FormId, one: Reaching | undefined): readonly HtmlChild[] {
   if (one === undefined) {
-    const name = `Limiting span of this deck: ${formLooks[form].short}`;
-    return [action('work it out', name, `reach.${form}`, () => desk.ask([form])), '', '', ''];
+    const of = `limiting span of this deck, ${formLooks[form].short}`;
+    return [action('work it out', of, `reach.${form}`, () => desk.ask([form])), '', '', ''];
   }
   if ('at' in one) return [one.at === '' ? 'waits' : `tries ${one.at}`, '', '', ''];
   if ('because' in one.found) return ['none', one.found.because, '', ''];
@@ -60,13 +65,12 @@ export function reachTable(desk: ReachDesk, { forms }: Reaches): HTMLElement {
         open.length > 0 &&
           action(
             open.length === reachable.length ? 'Work all out' : 'Work the others out',
-            'Limiting spans of this deck: all forms',
+            'limiting spans of this deck',
             'reach.all',
             () => desk.ask(open),
           ),
         open.length > 0 && isRunning && ' ',
-        isRunning &&
-          action('Leave off', 'Leave off working out limiting spans', 'reach.leave', desk.leaveOff),
+        isRunning && action('Leave off', 'limiting spans of this deck', 'reach.leave', desk.leaveOff),
       ),
     pushed(
       'Limiting spans of this deck',

@@ -165,11 +165,11 @@ describe('a span chart of its own', () => {
     const cell = page.locator('[id="1+030"]');
     const row = (form: string): Promise<string> =>
       cell.locator('.reaches').getByRole('row', { name: form }).innerText();
-    await page.getByRole('button', { name: 'Limiting spans of this deck: all forms' }).click();
+    await page.getByRole('button', { name: 'Work all out: limiting spans of this deck' }).click();
     await cell.getByText('tries').first().waitFor();
-    await page.getByRole('button', { name: 'Leave off working out limiting spans' }).click();
+    await page.getByRole('button', { name: 'Leave off: limiting spans of this deck' }).click();
     await expect.poll(() => cell.innerText()).not.toMatch(/waits|tries/u);
-    await page.getByRole('button', { name: 'Limiting span of this deck: Truss' }).click();
+    await page.getByRole('button', { name: 'work it out: limiting span of this deck, Truss' }).click();
     await expect.poll(() => row('Truss'), { timeout: 30_000 }).toMatch(/\d{3}\s+end post/u);
     expect(await row('Cable-stayed')).toContain('work it out');
     await expect.poll(() => rowOf(page, 'Truss')).toMatch(/carries no more from \d+.m: end post/u);
