@@ -1,6 +1,7 @@
 import { conclude, optionsOf } from './appraise/conclude.ts';
 import { memory, type Memory } from './appraise/memory.ts';
-import { formsAsked, proposeSteps, workOutSteps, type Step, type Steps } from './appraise/parts.ts';
+import { formsAsked } from './appraise/formsAsked.ts';
+import { proposeSteps, workOutSteps, type Step, type Steps } from './appraise/parts.ts';
 import { finish } from './appraise/work.ts';
 import type { Appraisal, Study } from './model/index.ts';
 

@@ -2,8 +2,8 @@
 export * from './model/index.ts';
 export { appraise, appraiseSteps } from './appraise.ts';
 export { conclude, optionsOf } from './appraise/conclude.ts';
+export { formsAsked, formsInParts } from './appraise/formsAsked.ts';
 export {
-  formsAsked,
   laySteps,
   proposeSteps,
   workOutSteps,
@@ -18,13 +18,28 @@ export { appraiseKept, type KeptAppraisal } from './appraise/appraiseKept.ts';
 export { choiceProblems } from './appraise/choiceProblems.ts';
 export { depthMissed } from './appraise/depthMissed.ts';
 export { depthBandOf, depthTrials } from './appraise/depthTrials.ts';
+export {
+  formReach,
+  limitM,
+  type FormReach,
+  type NoReach,
+  type PlainDeck,
+  type SpanReached,
+} from './appraise/formReach.ts';
 export { formFacts } from './appraise/facts.ts';
 export { PIER_HALF_WIDTH_M } from './appraise/requestFor.ts';
 export { ruledOut } from './appraise/ruledOut.ts';
 export { memory, type Memory } from './appraise/memory.ts';
 export { workbench, type Workbench } from './appraise/workbench.ts';
 export { publishedBands, type BandColumn, type PublishedBand } from './bands/publishedBands.ts';
-export { figure, figurePaths, trialFigure, type Context as FigureContext } from './explain/index.ts';
+export {
+  figure,
+  figurePaths,
+  reachFigure,
+  reachPath,
+  trialFigure,
+  type Context as FigureContext,
+} from './explain/index.ts';
 export { formModule, sizeableForms } from './forms/index.ts';
 export {
   builtBucket,

@@ -125,3 +125,6 @@ export const radiusText = (radiusM: number): string =>
   Math.abs(radiusM) > FLATTEST_M
     ? `> ${fixed(FLATTEST_M, 0)}`
     : fixed(Math.round(Math.abs(radiusM) / 10) * 10, 0);
+
+/** A limiting span, m: to the tenth, from 100 m to the metre, for it is found to half a hundredth. */
+export const reachText = (spanM: number): string => fixed(spanM, spanM < 100 ? 1 : 0);

@@ -54,7 +54,7 @@ export function appraiseKept(study: Study, before: AppraisedOption, kept: Memory
   const depthM = depthsM[units.indexOf(mainUnit(units))]!;
   const variant = asMade(own?.variant, before.variant ?? {}) ?? saidOf(own?.variant ?? {});
   const option: MadeOption = { number, form, method, units, depthM, variant, origin: 'kept' };
-  const onDraws = drawn(bench, [...new Set(units.map((unit) => unit.form))]);
+  const onDraws = drawn(bench);
   const faults = faultsOf(units, requestFor(option, ownSite, patternOf(form, units)), ownSite);
   try {
     return { option: appraiseOptionAt(bench, onDraws, option, depthsM).option, faults };

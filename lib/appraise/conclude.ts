@@ -1,4 +1,5 @@
 import { stand } from '../decide/index.ts';
+import { formsAsked } from './formsAsked.ts';
 import type { Appraisal, Study } from '../model/index.ts';
 import { survey } from '../site/index.ts';
 import { fingerprint } from '../study/index.ts';
@@ -15,7 +16,7 @@ export const optionsOf = (study: Study, found: readonly FormProposals[]): Regist
 
 /**
  * Puts the parts of an appraisal together: every option by cost, everything dropped with its reasons, and where the
- * options stand.
+ * options stand. Forms asked for that nothing was found of yet are still to come.
  */
 export function conclude(
   study: Study,
@@ -23,6 +24,10 @@ export function conclude(
   { register, retired, unworkable }: Registered,
   outcomes: readonly Outcome[],
 ): Appraisal {
+  const toCome = formsAsked(study).filter((asked) => found.every(({ form }) => form !== asked));
+  /** Numbers of forms still to come may be proposed again. */
+  const isOpen = (number: number): boolean =>
+    register.some((entry) => entry.number === number && toCome.includes(entry.form));
   const priced = outcomes.filter((outcome) => 'totals' in outcome);
   const contenders = priced.map(({ option: { number, status, cost }, totals }) => ({
     number,
@@ -46,7 +51,9 @@ export function conclude(
     ],
     droppedCounts: found.flatMap(({ counts }) => counts),
     register,
-    retired,
+    retired: retired.filter((number) => !isOpen(number)),
+    forms: found.map(({ form }) => form),
+    toCome,
     standing: stand(contenders, study.books, study.brief.budget),
   };
 }

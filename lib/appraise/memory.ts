@@ -70,7 +70,7 @@ export interface Memory {
   readonly supports: Kept<Support>;
   /** By brief without its budget. */
   readonly sites: Kept<SiteMemory>;
-  /** By seed, number, length, odds of the ground and forms. */
+  /** By seed, number, length and odds of the ground. */
   readonly draws: Kept<DrawsMemory>;
 }
 

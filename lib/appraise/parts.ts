@@ -1,7 +1,8 @@
-import { formModule, sizeableForms } from '../forms/index.ts';
+import { formModule } from '../forms/index.ts';
 import type { Dropped, FormId, Option, Study } from '../model/index.ts';
 import { appraiseOption, type PricedAppraisal } from './appraiseOption.ts';
 import { drawn } from './drawn.ts';
+import { formsAsked } from './formsAsked.ts';
 import type { Memory, Proposals, TrialRow } from './memory.ts';
 import { outBecause, proposalsFor } from './proposals.ts';
 import type { TrialRows } from './trialRows.ts';
@@ -18,10 +19,6 @@ export interface Step {
 /** Work in steps between which a worker may pause or drop it. */
 export type Steps<T> = Generator<Step, T, unknown>;
 
-/** The forms that a study asks for. */
-export const formsAsked = ({ options }: Study): readonly FormId[] =>
-  options.forms.length > 0 ? options.forms : sizeableForms;
-
 /** One of several who work on the same study: the `share`-th (0-based) of `of`. */
 export interface Share {
   readonly share: number;
@@ -31,14 +28,26 @@ export interface Share {
 /** A row of a cost table and what it is kept under: what those who work on one study hand each other. */
 export type LaidRow = readonly [key: string, row: TrialRow];
 
-/** Sizes the rows that a share of the cost tables of a study is read off; a form and an approach have one each. */
-export function* laySteps(study: Study, { share, of }: Share, kept: Memory): Steps<LaidRow[]> {
+/**
+ * Sizes the rows that a share of the cost tables of some forms of a study is read off; a form and an approach have one each.
+ * A table that forms asked for before these are read off as well is laid with them.
+ */
+export function* laySteps(
+  study: Study,
+  forms: readonly FormId[],
+  { share, of }: Share,
+  kept: Memory,
+): Steps<LaidRow[]> {
   const bench = workbench(study, kept);
-  const forms = formsAsked(study).filter((form) => outBecause(bench, form).length === 0);
-  const tables = new Set<TrialRows>(
-    forms.flatMap((form) => bench.tables.rowsOf({ form, method: formModule(form).methods[0] })),
-  );
+  const tables = new Map<TrialRows, FormId>();
+  for (const form of formsAsked(study)) {
+    if (outBecause(bench, form).length > 0) continue;
+    for (const rows of bench.tables.rowsOf({ form, method: formModule(form).methods[0] })) {
+      if (!tables.has(rows)) tables.set(rows, form);
+    }
+  }
   const mine = [...tables]
+    .flatMap(([rows, form]) => (forms.includes(form) ? [rows] : []))
     .filter((_, i) => i % of === share)
     .flatMap((table) => [...table.spansM.keys()].map((index) => ({ table, index })));
   const laid: LaidRow[] = [];
@@ -83,8 +92,7 @@ export type Outcome = PricedAppraisal | Dropped;
 /** Works out, prices and rules on some options of a study, each by itself: one that cannot be sized stops none of the others. */
 export function* workOutSteps(study: Study, options: readonly Option[], kept: Memory): Steps<Outcome[]> {
   const bench = workbench(study, kept);
-  const forms = new Set(options.flatMap((option) => option.units.map((unit) => unit.form)));
-  const onDraws = drawn(bench, [...forms].sort());
+  const onDraws = drawn(bench);
   const outcomes: Outcome[] = [];
   for (const option of options) {
     const step = { done: outcomes.length, of: options.length, what: `working out option ${option.number}` };

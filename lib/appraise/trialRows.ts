@@ -1,6 +1,5 @@
 import { formModule } from '../forms/index.ts';
-import type { Design, FormId, MeasuredLine, MethodId, Pattern, Site } from '../model/index.ts';
-import { leastOfTwoSpans, sideRatioWindow } from '../rules/index.ts';
+import type { Design, FormId, MeasuredLine, MethodId, Site } from '../model/index.ts';
 import { deckOnSupport } from '../substructure/index.ts';
 import { skewOn } from './askedTask.ts';
 import { meanClearance } from './meanClearance.ts';
@@ -15,6 +14,7 @@ import type { TrialRow } from './memory.ts';
 import type { Sizer } from './sizer.ts';
 import { tautSide } from './tautSide.ts';
 import { trialSpans } from './trialSpans.ts';
+import { isFrame, longestOfTwo, trialUnit } from './trialUnit.ts';
 import { finish, type Work } from './work.ts';
 
 /** Governing spans at which each form is really sized; in between cost grows with a power of the span. */
@@ -23,8 +23,6 @@ const TABLE_SPANS = 7;
 export const SHARES = [0.5, 1] as const;
 /** Spans under this are culverts, m. */
 const LEAST_SPAN_M = 8;
-/** End over interior span of a trial unit: inside every published window. */
-const TRIAL_END_RATIO = 0.78;
 
 /** A form built by one method. */
 export interface FormAndMethod {
@@ -36,37 +34,6 @@ export interface FormAndMethod {
 type CostOf = (lines: readonly MeasuredLine[]) => number;
 
 const isFixed = (line: MeasuredLine): boolean => line.part === 'pylons' || line.item === 'method-setup';
-
-/** One span or two in one with their walls. */
-const isFrame = (pattern: Pattern): boolean =>
-  pattern.kind === 'continuous' && (pattern.mostSpans ?? Infinity) <= 2;
-
-/** The longer of two spans of a frame over a crossing where the shorter is the least of it that rules leave open, m. */
-const longestOfTwo = (form: FormId, lengthM: number): number => lengthM / (1 + leastOfTwoSpans(form));
-
-/**
- * A unit of ordinary proportions for one governing span on a crossing: its spans, and its pylons where the form has them.
- * Of a frame the longer of two spans reaches no farther than where the shorter is the least of it: a longer one stands alone.
- */
-function trialUnit(
-  form: FormId,
-  spanM: number,
-  pylons: 1 | 2,
-  lengthM: number,
-): { spansM: number[]; pylons?: number[] } {
-  const pattern = formModule(form).pattern;
-  if (pattern.kind === 'simple-main') return { spansM: [spanM] };
-  if (pattern.kind === 'continuous' || pattern.kind === 'flanked') {
-    if (isFrame(pattern)) return { spansM: spanM <= longestOfTwo(form, lengthM) ? [spanM, spanM] : [spanM] };
-    return { spansM: [TRIAL_END_RATIO * spanM, spanM, TRIAL_END_RATIO * spanM] };
-  }
-  const [least, most] =
-    sideRatioWindow(form, pylons) ?? (pylons === 1 ? pattern.onePylonBack : pattern.twoPylonSide);
-  const side = ((least + most) / 2) * spanM;
-  return pylons === 1
-    ? { spansM: [spanM, side], pylons: [1] }
-    : { spansM: [side, spanM, side], pylons: [1, 2] };
-}
 
 /** Rows of one form and method: one for each of its spans, each sized when it is first read. */
 export interface TrialRows {

@@ -1,10 +1,10 @@
 import { DEEPEST_M } from '../appraise/depthThatCarries.ts';
 import type { OpenDepth } from '../appraise/deckDepth.ts';
 import { formModule, sizeableForms } from '../forms/index.ts';
-import type { DeckStrip, FormId, Problem, StandardId, UnitTask } from '../model/index.ts';
+import type { FormId, Problem, StandardId, UnitTask } from '../model/index.ts';
 import { standardIds } from '../model/index.ts';
-import { deckSpec } from '../site/index.ts';
-import { BARRIERS_M, LEAST_LANE_M, WIDEST_DECK_M } from './deckWidths.ts';
+import { BARRIERS_M, deckSpec, LEAST_LANE_M, plainStrips, SURFACING_M } from '../site/index.ts';
+import { WIDEST_DECK_M } from './deckWidths.ts';
 import { needFlags, readFlags, type Flags } from './flags.ts';
 import { numberFlag } from './numberFlag.ts';
 import { refuse } from './refusal.ts';
@@ -29,7 +29,6 @@ const flagNames = [
   'ballast',
   'cast-in',
 ];
-const SURFACING_M = 0.09;
 /** Published factors of skew decks end here. */
 const MOST_SKEW_DEG = 60;
 
@@ -254,14 +253,7 @@ export function readTask(argv: readonly string[]): Asked {
   }
   if (problems.length > 0 || !form || !standard || widthM === undefined || lanes === undefined)
     refuse(problems);
-  const kerbToKerb = carriagewayM!;
-  const edge: DeckStrip = {
-    kind: 'barrier',
-    widthM: (widthM - kerbToKerb) / 2,
-    ultimateWidthM: (widthM - kerbToKerb) / 2,
-  };
-  const lane: DeckStrip = { kind: 'lane', widthM: kerbToKerb / lanes, ultimateWidthM: kerbToKerb / lanes };
-  const strips = [edge, ...Array.from({ length: lanes }, () => lane), edge];
+  const strips = plainStrips(widthM, carriagewayM!, lanes);
   const module = formModule(form);
   const task: Asked['task'] = {
     form,

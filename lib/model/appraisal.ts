@@ -228,5 +228,8 @@ export interface Appraisal {
   /** Numbers given so far, for the study to keep, and those that nothing proposes any more. */
   readonly register: readonly RegisterEntry[];
   readonly retired: readonly number[];
+  /** Forms asked for that this is the answer of, and those still to come: none where it is the whole answer. */
+  readonly forms: readonly FormId[];
+  readonly toCome: readonly FormId[];
   readonly standing: Standing;
 }

@@ -5,6 +5,7 @@ export { deckSpec } from './deckSpec.ts';
 export { bearingLevel, groundAt, soffitLimitAt, softZonesAt, stretchAt, waterDepthAt } from './lookups.ts';
 export type { DepthAlong } from './depthAlong.ts';
 export { headroomSpare, type HeadroomSpare } from './headroomSpare.ts';
+export { BARRIERS_M, LEAST_LANE_M, plainStrips, SURFACING_M } from './plainDeck.ts';
 export { profileFor, type ProfileRefusal, type ProfileResult } from './profileFor.ts';
 export { proposedProfile } from './profileOn.ts';
 export { easedProfile } from './easedProfile.ts';

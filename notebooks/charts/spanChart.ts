@@ -1,5 +1,5 @@
 import { scaleLog } from 'd3-scale';
-import { fixed, length } from '../format.ts';
+import { fixed, length, reachText } from '../format.ts';
 import { dataFigure, type Asked } from '../drawing/asked.ts';
 import { colours, letters, pens } from '../drawing/ink.ts';
 import type { Paper } from '../drawing/ink.ts';
@@ -35,6 +35,8 @@ export interface SpanRow {
   readonly flip?: string;
   /** Where its figures come from, where they can be asked. */
   readonly figures?: SpanFigures;
+  /** The span from which it carries no more with the deck in question, and the check that ends it. */
+  readonly limit?: { readonly spanM: number; readonly words: string; readonly figure?: Asked };
 }
 
 /** Paths of the figures of a row; undefined for one that is no figure, e.g. the end of an axis. */
@@ -116,10 +118,44 @@ function bars(row: SpanRow, y: number, x: (m: number) => number, ink: FormInk): 
   );
 }
 
+const hasLimits = ({ rows }: SpanChartInput): boolean => rows.some(({ limit }) => limit !== undefined);
+
+/** Half the height of the tick of a limiting span, px. */
+const TICK_PX = 8;
+
+/** The limiting span of a row: a heavy tick and the span beside it; the check that ends it is among the words of the row. */
+function limitTick(
+  { limit }: SpanRow,
+  y: number,
+  x: (m: number) => number,
+  right: number,
+  accent: string,
+): Piece | null {
+  if (limit === undefined) return null;
+  const at = x(limit.spanM);
+  const words = `${reachText(limit.spanM)} m`;
+  const isTurned = at + 8 + textWidth(words, letters.drawing) > right;
+  return g(
+    { class: 'limit' },
+    el('path', {
+      d: `M${num(at)},${num(y - TICK_PX)}V${num(y + TICK_PX)}`,
+      stroke: accent,
+      'stroke-width': pens.heavy,
+      fill: 'none',
+    }),
+    label(isTurned ? at - 5 : at + 5, y - 5, words, {
+      fill: accent,
+      anchor: isTurned ? 'end' : 'start',
+      halo: true,
+      figure: limit.figure,
+    }),
+  );
+}
+
 /** The ends a span axis needs to hold rows and the asked span, m. */
 export function spanAxis(rows: readonly SpanRow[], askedM: number | null): readonly [number, number] {
   const known = rows
-    .flatMap((row) => [...row.usual, ...(row.possible ?? [])])
+    .flatMap((row) => [...row.usual, ...(row.possible ?? []), ...(row.limit ? [row.limit.spanM] : [])])
     .concat(askedM === null ? [] : [askedM]);
   return [Math.min(5, ...known), Math.max(100, ...known) * 1.05];
 }
@@ -134,21 +170,27 @@ interface RowLine {
 
 /**
  * The words of a row broken into lines; what it takes to stand otherwise follows in second ink, behind them where they
- * and it fit one line, else below.
+ * and it fit one line, else below, and below all what ends its spans with the deck in question.
  */
-function linesOf({ words, flip }: SpanRow, widthPx: number, size: number): readonly RowLine[] {
+function linesOf({ words, flip, limit }: SpanRow, widthPx: number, size: number): readonly RowLine[] {
   const said = wrapText(words, widthPx, size);
-  const lines = said.map((text, line) => ({ text, second: false, dx: 0, line }));
-  if (flip === undefined) return lines;
-  const before = `${words}; `;
-  const dx = textWidth(before, size);
-  if (said.length === 1 && dx + textWidth(flip, size) <= widthPx)
-    return [
-      { text: before.trimEnd(), second: false, dx: 0, line: 0 },
-      { text: flip, second: true, dx, line: 0 },
-    ];
-  const below = wrapText(flip, widthPx, size);
-  return [...lines, ...below.map((text, at) => ({ text, second: true, dx: 0, line: said.length + at }))];
+  const lines: RowLine[] = said.map((text, line) => ({ text, second: false, dx: 0, line }));
+  const below = (text: string): void => {
+    const from = lineCount(lines);
+    wrapText(text, widthPx, size).forEach((one, at) =>
+      lines.push({ text: one, second: true, dx: 0, line: from + at }),
+    );
+  };
+  if (flip !== undefined) {
+    const before = `${words}; `;
+    const dx = textWidth(before, size);
+    if (said.length === 1 && dx + textWidth(flip, size) <= widthPx) {
+      lines[0] = { text: before.trimEnd(), second: false, dx: 0, line: 0 };
+      lines.push({ text: flip, second: true, dx, line: 0 });
+    } else below(flip);
+  }
+  if (limit !== undefined) below(`carries no more from ${reachText(limit.spanM)}\u00a0m: ${limit.words}`);
+  return lines;
 }
 
 const lineCount = (lines: readonly RowLine[]): number => Math.max(0, ...lines.map(({ line }) => line + 1));
@@ -227,6 +269,7 @@ export function spanChart(input: SpanChartInput): Piece {
           { class: `form ${row.status}` },
           index > 0 && levelLine(0, widthPx, tops[index] ?? head, newGroup),
           glyph(row.form, 0, y - 8, out ? colours.rule : ink.line(row.form)),
+          limitTick(row, y, x, right, ink.accent),
           label(nameX, y + 4.5, formLooks[row.form].short, { size: letters.table, fill: ownInk }),
           label(statusX, y + 4.5, row.status, {
             size: letters.table,
@@ -245,6 +288,9 @@ export function spanChart(input: SpanChartInput): Piece {
       }),
       label(narrow ? 0 : left, foot, 'thick: usual range', { fill: colours.second }),
       label(narrow ? 110 : left + 108, foot, 'thin: possible', { fill: colours.second }),
+      !narrow &&
+        hasLimits(input) &&
+        label(left + 440, foot, 'red: limiting span of this deck', { fill: colours.second }),
       hasStatistics &&
         label(narrow ? 0 : left + 222, foot + (narrow ? 15 : 0), 'grey: 5, 50 and 95 % of built bridges', {
           fill: colours.second,
@@ -266,6 +312,7 @@ export const spanTable = (input: SpanChartInput): Table => ({
     '5 %',
     '50 %',
     '95 %',
+    ...(hasLimits(input) ? ['limiting span', 'ended by'] : []),
     'standing',
     'because',
   ],
@@ -281,6 +328,12 @@ export const spanTable = (input: SpanChartInput): Table => ({
       '',
       '',
     ]),
+    ...(hasLimits(input)
+      ? [
+          row.limit ? { text: reachText(row.limit.spanM), figure: row.limit.figure } : '',
+          row.limit?.words ?? '',
+        ]
+      : []),
     row.status,
     row.flip === undefined ? row.words : `${row.words}; ${row.flip}`,
   ]),

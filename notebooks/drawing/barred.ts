@@ -39,16 +39,23 @@ interface Barred {
   readonly fromM: number;
   readonly toM: number;
   readonly words: string;
+  /** What bars it, by name. */
+  readonly names: readonly string[];
 }
 
 /** Neighbouring hard zones run together, with one name. */
 function barredStretches(site: Site): Barred[] {
   const hard = site.zones.filter((zone) => zone.hard).sort((a, b) => a.fromM - b.fromM);
-  const out: { fromM: number; toM: number; words: string }[] = [];
+  const out: { fromM: number; toM: number; words: string; names: string[] }[] = [];
   for (const zone of hard) {
     const last = out[out.length - 1];
-    if (last !== undefined && zone.fromM <= last.toM + 0.05) last.toM = Math.max(last.toM, zone.toM);
-    else out.push({ fromM: zone.fromM, toM: zone.toM, words: zone.kind === 'river' ? 'no pier' : zone.kind });
+    if (last !== undefined && zone.fromM <= last.toM + 0.05) {
+      last.toM = Math.max(last.toM, zone.toM);
+      last.names.push(zone.name);
+    } else {
+      const { fromM, toM, kind, name } = zone;
+      out.push({ fromM, toM, words: kind === 'river' ? 'no pier' : kind, names: [name] });
+    }
   }
   return out.map((stretch) =>
     stretch.words === 'no pier'
@@ -72,11 +79,50 @@ export const barredWash = (site: Site, frame: Frame, top: number, bottom: number
     ),
   );
 
-/** Barred stretches with the line their words stand in, counted up from the bracket: those that would touch stand in different ones. */
-function bracketLines(site: Site, pxPerM: number): (Barred & { readonly line: number })[] {
+/** On a sheet narrower than this, px, words over brackets that would need a second line stand in a key below instead. */
+const KEYED_UNDER_PX = 480;
+
+/** Stretch and scale of a drawing with brackets. */
+type Shown = Pick<Frame, 'fromM' | 'toM' | 'pxPerM'>;
+
+interface Bracket extends Barred {
+  /** Line that its words stand in, counted up from the bracket. */
+  readonly line: number;
+  /** What its letter stands for in the key below; absent where its words stand over it. */
+  readonly keyed?: string;
+}
+
+/** The brackets over barred stretches, each with its words, or with a letter where there is no room for the words of all. */
+function bracketsOf(site: Site, { fromM, toM, pxPerM }: Shown): readonly Bracket[] {
+  const said = bracketLines(barredStretches(site), pxPerM);
+  const isKeyed = (toM - fromM) * pxPerM < KEYED_UNDER_PX && said.some(({ line }) => line > 0);
+  if (!isKeyed) return said;
+  const lettered = said.map((stretch, i) => {
+    const { words, names } = stretch;
+    const isNamed = !words.startsWith('no pier');
+    return {
+      ...stretch,
+      words: String.fromCodePoint(A + i),
+      keyed: isNamed ? names.join(', ') : `${names.join(', ')} (${words})`,
+    };
+  });
+  return bracketLines(lettered, pxPerM);
+}
+
+const A = 'a'.codePointAt(0)!;
+
+/** Names of what bars stretches whose brackets have letters. */
+export const keyedNames = (site: Site, shown: Shown): ReadonlySet<string> =>
+  new Set(bracketsOf(site, shown).flatMap(({ keyed, names }) => (keyed === undefined ? [] : names)));
+
+/** Brackets with the line their words stand in, counted up from the bracket: those that would touch stand in different ones. */
+function bracketLines<T extends Barred>(
+  stretches: readonly T[],
+  pxPerM: number,
+): (T & { readonly line: number })[] {
   /** How far the words of each line reach, px from chainage nought. */
   const reach: number[] = [];
-  return barredStretches(site).map((stretch) => {
+  return stretches.map((stretch) => {
     const middle = ((stretch.fromM + stretch.toM) / 2) * pxPerM;
     const half = textWidth(stretch.words, letters.drawing) / 2;
     const free = reach.findIndex((right) => middle - half >= right + 6);
@@ -90,9 +136,12 @@ function bracketLines(site: Site, pxPerM: number): (Barred & { readonly line: nu
 const WORDS_PX = 5;
 const LINE_PX = 12;
 
-/** Height that brackets take over their level line, to the top of their words with some air, px; 0 where nothing is barred. */
+/**
+ * Height that brackets take over their level line, to the top of their words with some air, px; 0 where nothing is barred.
+ * Letters take as much as the words they stand for: brackets that are close need the room to be taken hold of.
+ */
 export function bracketsPx(site: Site, pxPerM: number): number {
-  const lines = bracketLines(site, pxPerM).map(({ line }) => line + 1);
+  const lines = bracketLines(barredStretches(site), pxPerM).map(({ line }) => line + 1);
   return lines.length === 0 ? 0 : WORDS_PX + LINE_PX * Math.max(...lines) + 2;
 }
 
@@ -101,8 +150,8 @@ export const bracketWords = (
   site: Site,
   frame: Frame,
   y: number,
-): (Barred & { readonly x: number; readonly y: number; readonly isMain: boolean })[] =>
-  bracketLines(site, frame.pxPerM).map((stretch) => ({
+): (Bracket & { readonly x: number; readonly y: number; readonly isMain: boolean })[] =>
+  bracketsOf(site, frame).map((stretch) => ({
     ...stretch,
     x: frame.x((stretch.fromM + stretch.toM) / 2),
     y: y - WORDS_PX - stretch.line * LINE_PX,
@@ -115,7 +164,8 @@ export const barredBrackets = (site: Site, frame: Frame, y: number, accent: stri
     { class: 'brackets' },
     bracketWords(site, frame, y).map((stretch) =>
       g(
-        {},
+        { 'data-letter': stretch.keyed === undefined ? undefined : stretch.words },
+        stretch.keyed !== undefined && el('title', {}, stretch.keyed),
         el('path', {
           d: `M${num(frame.x(stretch.fromM))},${num(y + 6)}V${num(y)}H${num(frame.x(stretch.toM))}V${num(y + 6)}`,
           fill: 'none',
@@ -131,3 +181,14 @@ export const barredBrackets = (site: Site, frame: Frame, y: number, accent: stri
       ),
     ),
   );
+
+/** What the letters over the brackets of a drawing stand for, in order; empty where words stand over them. */
+export function bracketKey({ children }: Piece): { readonly letter: string; readonly names: string }[] {
+  return children.flatMap((child) => {
+    if (typeof child === 'string') return [];
+    const letter = child.attrs['data-letter'];
+    if (letter === undefined) return child.tag === 'g' || child.tag === 'svg' ? bracketKey(child) : [];
+    const title = child.children.find((one): one is Piece => typeof one !== 'string' && one.tag === 'title');
+    return [{ letter, names: title?.children.filter((one) => typeof one === 'string').join('') ?? '' }];
+  });
+}

@@ -6,7 +6,7 @@ import { PARAPET_M, roadLevel, soffitLevel, spanPaths, supportChainages } from '
 import { bubbleRadius, bubbles } from './bubbles.ts';
 import type { Asked } from './asked.ts';
 import { ofOption } from './asked.ts';
-import { barredBrackets, barredDimension, barredWash, bracketsPx } from './barred.ts';
+import { barredBrackets, barredDimension, barredWash, bracketsPx, keyedNames } from './barred.ts';
 import type { Envelope } from './clearances.ts';
 import { clearances, envelopes } from './clearances.ts';
 import { belowGround, depthMarks, levelMarks, names, takeRoom } from './crossingLetters.ts';
@@ -176,7 +176,9 @@ export function crossing(input: CrossingInput): Piece {
   // On a hand-held screen lettering of levels and founding would touch.
   const cramped = small || widthPx < 480;
   const levels = cramped ? [] : levelMarks(site, option, input.obstacles, room);
-  const named = names(site, room);
+  // What stands in the key below is not said twice.
+  const keyed = small ? keyedNames(site, frame) : new Set<string>();
+  const named = names(site, room, keyed);
   const below = cramped ? [] : belowGround(site, option, room, range.bottomM);
 
   const chainages = option === null ? [site.startM, site.endM] : supportChainages(option);

@@ -139,12 +139,15 @@ export function depthMarks(site: Site, option: AppraisedOption, room: Room): Pie
   });
 }
 
-/** Names of waters and ways in italics, as on maps. */
-export function names(site: Site, room: Room): (Piece | null)[] {
+/**
+ * Names of waters and ways in italics, as on maps.
+ * @param elsewhere those that stand in the key of the drawing
+ */
+export function names(site: Site, room: Room, elsewhere: ReadonlySet<string>): (Piece | null)[] {
   const { frame } = room;
   const river = site.waters.map((water) => {
     const middle = (Math.max(water.fromM, frame.fromM) + Math.min(water.toM, frame.toM)) / 2;
-    if (water.toM < frame.fromM || water.fromM > frame.toM) return null;
+    if (elsewhere.has(water.name) || water.toM < frame.fromM || water.fromM > frame.toM) return null;
     const bed = Math.min(
       ...site.groundZ.filter(
         (_, i) => (site.groundX[i] ?? 0) >= water.fromM && (site.groundX[i] ?? 0) <= water.toM,
@@ -161,7 +164,7 @@ export function names(site: Site, room: Room): (Piece | null)[] {
     );
   });
   const ways = site.zones
-    .filter((zone) => zone.kind === 'railway' || zone.kind === 'road')
+    .filter(({ kind, name }) => (kind === 'railway' || kind === 'road') && !elsewhere.has(name))
     .map((zone) => {
       const middle = (zone.fromM + zone.toM) / 2;
       if (middle < frame.fromM || middle > frame.toM) return null;

@@ -22,7 +22,7 @@ import { outTable } from './outTable.ts';
 import { studyDesk } from './studyDesk.ts';
 import { withKeyed } from './withKeyed.ts';
 import type { StudyCells } from './studyCells.ts';
-import { budgetOf } from './words.ts';
+import { budgetOf, findingOf, toComeWords } from './words.ts';
 
 /** Section 3: every option drawn on one chainage and one scale, with its cost beside it. */
 export function arrangementSection(
@@ -35,7 +35,10 @@ export function arrangementSection(
   const finding = page.live({ appraisal }, (v) => {
     const kept = v.appraisal.options.length;
     const dropped = droppedTotal(v.appraisal);
-    return `Of ${fixed(kept + dropped, 0)} arrangements, ${kept} are worked out and ${fixed(dropped, 0)} dropped, each with its reason.`;
+    return findingOf(
+      v.appraisal,
+      `Of ${fixed(kept + dropped, 0)} arrangements, ${kept} are worked out and ${fixed(dropped, 0)} dropped, each with its reason.`,
+    );
   });
   const chosen = (event: Event): void => {
     const { number } = (event as ChooseReference).detail;
@@ -93,15 +96,18 @@ export function arrangementSection(
         widthPx: room.widthPx,
         prefix: 'stack',
       };
+      const { appraisal: of } = v.stacked;
+      const toCome = toComeWords(of);
+      const missing = toCome !== '' && h('p', { class: 'small' }, toCome);
       if (room.paperPx !== null) {
         const parts = stackOnPaper(input, room.paperPx, room.paperPx - OVER_STACK_PX);
-        return parts.map((part) => h('div', { class: 'part' }, part));
+        return [parts.map((part) => h('div', { class: 'part' }, part)), missing];
       }
-      const { appraisal: of } = v.stacked;
       return [
         withKeyed(
           inRoom(stack({ ...input, hands: v.hands }), room.widthPx + stackOutset, 'Elevations', 'with-bar'),
         ),
+        missing,
         drawn.length < all.length && outOf(of, reference),
         droppedBy(of),
       ];

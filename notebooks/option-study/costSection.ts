@@ -11,7 +11,7 @@ import type { Graph } from '../reactive/index.ts';
 import { asItStandsNote } from './asItStandsNote.ts';
 import { madeFigure } from './madeFigure.ts';
 import type { StudyCells } from './studyCells.ts';
-import { budgetOf, priceDateWords } from './words.ts';
+import { budgetOf, findingOf, priceDateWords } from './words.ts';
 
 const STEEL = 'plate-girder-steel';
 
@@ -39,9 +39,12 @@ export function costSection(page: Sheet, graph: Graph, store: StudyStore, cells:
   const finding = page.live({ appraisal }, (v) => {
     const { groups } = v.appraisal.standing;
     const level = groups.filter((group) => group.length > 1).length;
-    return level === 0
-      ? 'Every option is separated from the next.'
-      : `${groups.length === 1 ? 'One group' : `${String(groups.length)} groups`}; inside a group cost does not decide.`;
+    return findingOf(
+      v.appraisal,
+      level === 0
+        ? 'Every option is separated from the next.'
+        : `${groups.length === 1 ? 'One group' : `${String(groups.length)} groups`}; inside a group cost does not decide.`,
+    );
   });
   const shows = { appraisal, reference, brief, books };
   const common = (

@@ -48,6 +48,14 @@ export function askedWords(study: Study): string {
   return `Of ${String(asked.length + not.length)} forms ${countWords(asked.length)} ${asked.length === 1 ? 'is' : 'are'} asked for; ${are}, and nothing is worked out for them.`;
 }
 
+/** Which forms are asked for and which are not, where some are not. */
+export function listWords(study: Study): string {
+  const names = (forms: readonly FormId[]): string =>
+    listed(forms.map((form) => formLooks[form].short.toLowerCase().replace(/ i$/u, ' I')));
+  const asked = formsAsked(study);
+  return `Asked for: ${names(formIds.filter((form) => asked.includes(form)))}. Not asked for: ${names(formsNotAsked(study))}.`;
+}
+
 /** Forms that stand in the chart of spans and that no study can have worked out; empty where there are none. */
 export function unsizedWords(): string {
   const unsized = formIds.filter((form) => !sizeableForms.includes(form));

@@ -5,6 +5,7 @@ import {
   sentence,
   standardNames,
   writeStudy,
+  type Appraisal,
   type Problem,
   type Study,
 } from '../../lib/index.ts';
@@ -57,7 +58,7 @@ import { sectionSection } from './sectionSection.ts';
 import { spanSection } from './spanSection.ts';
 import { studyCells } from './studyCells.ts';
 import { studyWhereFrom } from './whereFrom.ts';
-import { answerWords, nextWords, pricesWords } from './words.ts';
+import { answerWords, nextWords, partWords, pricesWords } from './words.ts';
 
 /**
  * What is wrong with a study that follows on another; nothing when it is valid. Read back from its own text, as a file would
@@ -195,6 +196,10 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
   });
   undoKeys(store);
 
+  const appraised = (): Appraisal | null => {
+    const state = graph.state(cells.appraisal);
+    return 'value' in state ? state.value : null;
+  };
   const { head, brief, books } = store.slices;
   const { words } = fieldsOf(graph, store, problemBeside);
   const element = page.mount(document.body, {
@@ -238,9 +243,12 @@ export async function openPage(coming: Promise<string | null> | null): Promise<v
       ],
     },
     foot: () => {
-      const appraised = graph.state(cells.appraisal);
-      const fingerprint = 'value' in appraised ? appraised.value.study.fingerprint.slice(0, 12) : '';
+      const fingerprint = appraised()?.study.fingerprint.slice(0, 12) ?? '';
       return [store.valid().reference, fingerprint, `prices ${pricesWords(store.valid())}, demo rates`];
+    },
+    unfinished: () => {
+      const appraisal = appraised();
+      return appraisal === null ? '' : partWords(appraisal);
     },
     sections: [
       briefSection(page, graph, store, cells),

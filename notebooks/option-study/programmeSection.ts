@@ -8,7 +8,7 @@ import { h } from '../html.ts';
 import { workedFigure, type LineSection, type Sheet } from '../page/index.ts';
 import { mainDesign, mainDesignPath } from '../drawing/sectionRow.ts';
 import type { StudyCells } from './studyCells.ts';
-import { budgetOf } from './words.ts';
+import { budgetOf, findingOf } from './words.ts';
 
 const certain = (value: number): Spread => ({ p10: value, p50: value, p90: value });
 
@@ -57,11 +57,11 @@ export function programmeSection(page: Sheet, cells: StudyCells): LineSection {
   const finding = page.live({ appraisal }, (v) => {
     const quick = [...v.appraisal.options].sort((a, b) => a.months.p50 - b.months.p50)[0];
     return quick
-      ? [
+      ? findingOf(v.appraisal, [
           `Option ${quick.number} is first, after `,
           workedFigure(ofOption(quick, 'months/p50'), fixed(quick.months.p50, 0)),
           ' months.',
-        ]
+        ])
       : '';
   });
   return page.section(8, 'Programme', finding, [

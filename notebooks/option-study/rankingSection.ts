@@ -9,7 +9,7 @@ import { pushed, workedFigure, type LineSection, type Sheet, type StudyStore } f
 import type { Graph } from '../reactive/index.ts';
 import { priorityTable } from './priorities/priorityTable.ts';
 import type { StudyCells } from './studyCells.ts';
-import { budgetOf } from './words.ts';
+import { budgetOf, findingOf, toComeWords } from './words.ts';
 
 const effects: readonly Ruling['effect'][] = ['out', 'caution', 'to confirm', 'in favour'];
 
@@ -98,7 +98,9 @@ function warningsTable(options: readonly AppraisedOption[]): HTMLElement {
 /** Section 10: order under the budget, and the rulings behind it. */
 export function rankingSection(page: Sheet, graph: Graph, store: StudyStore, cells: StudyCells): LineSection {
   const { appraisal, reference, brief } = cells;
-  const finding = page.live({ appraisal }, (v) => v.appraisal.standing.because[0] ?? '');
+  const finding = page.live({ appraisal }, (v) =>
+    findingOf(v.appraisal, v.appraisal.standing.because[0] ?? ''),
+  );
   return page.section(10, 'Ranking under the budget', finding, [
     page.cell({
       station: '10+010',
@@ -117,6 +119,7 @@ export function rankingSection(page: Sheet, graph: Graph, store: StudyStore, cel
           }),
         ),
       notes: (v) => [
+        v.appraisal.toCome.length > 0 && h('p', {}, toComeWords(v.appraisal)),
         v.appraisal.standing.because.slice(1).map((words) => h('p', {}, words)),
         v.appraisal.dropped.map(({ form, option, because }) => {
           const of = option === undefined ? '' : `Option ${String(option)}, `;

@@ -6,7 +6,7 @@ import { tableBehind } from '../charts/table.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
-import { askedWords, formsTable, unsizedWords } from './formsTable.ts';
+import { askedWords, formsNotAsked, formsTable, listWords, unsizedWords } from './formsTable.ts';
 import type { StudyCells } from './studyCells.ts';
 
 const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartInput => ({
@@ -18,8 +18,8 @@ const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartI
   prefix: 'spans',
 });
 
-/** The heading over the chart on its printed sheet, and the notes under it, px. */
-const ROUND_CHART_PX = 110;
+/** The heading over the chart on its printed sheet, the notes under it, and the forms asked for, which stand there too, px. */
+const ROUND_CHART_PX = 275;
 
 /** Section 2: every form against the span that the barred stretch asks for. */
 export function spanSection(page: Sheet, store: StudyStore, cells: StudyCells): LineSection {
@@ -74,11 +74,14 @@ export function spanSection(page: Sheet, store: StudyStore, cells: StudyCells): 
       station: '2+020',
       title: 'Forms asked for',
       shows: { options: store.slices.options },
-      body: () => {
+      body: (_, room) => {
         const study = store.valid();
         return [
           h('p', { class: 'prose' }, askedWords(study)),
-          formsTable(study, store),
+          // On paper nothing is asked for or left out: a sentence leaves room for it under the chart.
+          room.paperPx === null
+            ? formsTable(study, store)
+            : formsNotAsked(study).length > 0 && h('p', { class: 'small' }, listWords(study)),
           h('p', { class: 'small' }, unsizedWords()),
         ];
       },

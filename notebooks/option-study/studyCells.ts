@@ -45,7 +45,7 @@ function referenceIn({ options, standing }: Appraisal, asked: number | null): Ap
 
 /**
  * The cells behind the page. The appraisal is worked out off the page's thread from the brief, the books and the
- * options; the reference is a view setting and works nothing out anew. Until the appraisal of an edit has come the reference
+ * options, the first one in parts, so that a ranking of some forms stands while the others are searched; the reference is a view setting and works nothing out anew. Until the appraisal of an edit has come the reference
  * is worked out on the page's own thread as it stood, so that its drawing, headroom, price and check follow a drag.
  *
  * Numbers given once are kept here for the life of the page and come back with `register()` when the study is saved.
@@ -62,22 +62,28 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     return before;
   });
   const last = graph.input<Answer | null>('last answer', null);
-  let answered: Study | undefined;
+  let answer: Answer | null = null;
   const appraisal = graph.slow(
     'appraisal',
     { asked },
     async (v, run): Promise<Appraisal> => {
       await untilDragRests(run.signal);
       const numbered = { ...v.asked, options: { ...v.asked.options, register } };
-      const result = await worker.appraise(numbered, run);
-      register = result.register;
-      answered = v.asked;
-      return result;
+      const taken = (result: Appraisal): Appraisal => {
+        register = result.register;
+        answer = { asked: v.asked, appraisal: result };
+        return result;
+      };
+      // Where all forms stand already, those of an answer in parts would be gone for a while.
+      const inParts = answer === null || answer.appraisal.toCome.length > 0;
+      const { signal, report } = run;
+      const handOn = (part: unknown): void => run.handOn(taken(part as Appraisal));
+      return taken(await worker.appraise(numbered, { signal, report, ...(inParts && { handOn }) }));
     },
     { policy: 'latest' },
   );
   graph.watch(appraisal, (state) => {
-    if (state.state === 'ready' && answered) graph.set(last, { asked: answered, appraisal: state.value });
+    if ('value' in state && state.value === answer?.appraisal) graph.set(last, answer);
   });
   const kept = memory();
   /** Options kept by hand as they were last worked out: one that cannot be worked out any more is not lost. */
@@ -104,7 +110,7 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
     { options, asked, last },
     async (v, run): Promise<readonly AppraisedOption[]> => {
       const option = v.last && referenceIn(v.last.appraisal, v.options.reference);
-      if (!option || v.last.asked !== v.asked) return depths;
+      if (!option || v.last.asked !== v.asked || v.last.appraisal.toCome.length > 0) return depths;
       // What everything else hangs on is drawn first.
       await untilDragRests(run.signal);
       await idle(run.signal);
@@ -118,12 +124,12 @@ export function studyCells(graph: Graph, store: StudyStore, worker: Appraiser) {
   graph.watch(byDepth, (state) => {
     if (state.state !== 'ready') return;
     whenIdle(() => {
-      const [answer, now, views] = [graph.state(last), graph.state(asked), graph.state(options)];
-      if (answer.state !== 'ready' || now.state !== 'ready' || views.state !== 'ready') return;
+      const [given, now, views] = [graph.state(last), graph.state(asked), graph.state(options)];
+      if (given.state !== 'ready' || now.state !== 'ready' || views.state !== 'ready') return;
       // While there is no answer yet the reference has just been worked out like this anyway.
-      if (answer.value?.asked !== now.value) return;
+      if (given.value?.asked !== now.value || given.value.appraisal.toCome.length > 0) return;
       const study = now.value;
-      const option = held(study, answer.value, views.value.reference);
+      const option = held(study, given.value, views.value.reference);
       const isStill = (): boolean => {
         const then = graph.state(asked);
         return then.state === 'ready' && then.value === study;

@@ -3,7 +3,8 @@ import type { Appraisal, AppraisedOption, Brief, Site, Spread, Study } from '../
 import { spanPaths, spansOf } from '../drawing/alongOption.ts';
 import { ofOption } from '../drawing/asked.ts';
 import { optionTitle } from '../drawing/optionWords.ts';
-import { capitalised, fixed, listed, money2, moneyUnit, odds, spansText } from '../format.ts';
+import { formLooks } from '../forms/formLook.ts';
+import { capitalised, countWords, fixed, listed, money2, moneyUnit, odds, spansText } from '../format.ts';
 import type { HtmlChild } from '../html.ts';
 import { workedFigure } from '../page/index.ts';
 
@@ -32,8 +33,34 @@ export function firstOfEachForm(options: readonly AppraisedOption[]): AppraisedO
   return options.filter((option, i) => options.findIndex(({ form }) => form === option.form) === i);
 }
 
-/** The page's answer in one or two sentences. */
-export function answerWords({ options, standing, currency }: Appraisal): HtmlChild {
+/** How many forms are still to come, of an answer in parts; '' of a whole one. */
+export const partWords = ({ forms, toCome }: Appraisal): string =>
+  toCome.length === 0
+    ? ''
+    : `Of ${forms.length + toCome.length} forms ${forms.length} are done so far and ${toCome.length} still to come.`;
+
+/** Which forms are still to come, for where the others stand in order; '' of a whole answer. */
+export const toComeWords = ({ toCome }: Appraisal): string =>
+  toCome.length === 0
+    ? ''
+    : `Still to come, and not in the order yet: ${listed(toCome.map((form) => formLooks[form].short))}.`;
+
+/** A finding, and of an answer in parts how much is still to come. */
+export function findingOf({ toCome: { length } }: Appraisal, finding: HtmlChild): HtmlChild {
+  if (length === 0) return finding;
+  return [
+    finding,
+    ` ${capitalised(countWords(length))} ${length === 1 ? 'form is' : 'forms are'} still to come.`,
+  ];
+}
+
+/** The page's answer in one or two sentences; before them how much of it there is. */
+export function answerWords(appraisal: Appraisal): HtmlChild {
+  const part = partWords(appraisal);
+  return part === '' ? standingWords(appraisal) : [part, ' ', standingWords(appraisal)];
+}
+
+function standingWords({ options, standing, currency }: Appraisal): HtmlChild {
   const leader = options.find((option) => option.number === standing.leader);
   if (!leader) return 'No option stands inside the rules. What would let one in is said at 10+010.';
   const unit = moneyUnit(currency, leader.cost.p50);

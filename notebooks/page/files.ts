@@ -35,3 +35,7 @@ export function saveFile(name: string, content: BlobPart, type = 'application/js
   // The browser reads the address after the click has been dealt with.
   setTimeout(() => URL.revokeObjectURL(address), 10_000);
 }
+
+/** Words as the name of a file; of what is `unfinished`, which is not '', the name says that it is so far. */
+export const fileNameOf = (words: string, unfinished: string): string =>
+  `${words}${unfinished === '' ? '' : ' so far'}`.toLowerCase().replace(/[^a-z0-9]+/gu, '-');

@@ -75,11 +75,17 @@ function gapsIn(piece: Piece): number[] {
   });
 }
 
+/** How drawings are printed alone. */
+export interface Printed {
+  readonly paper: PaperName;
+  /** What they are of, and what they are. */
+  readonly heading: readonly string[];
+  /** What is said of them before all that they show is there; '' once it is. */
+  readonly unfinished: string;
+}
+
 /** Prints drawings alone, each on its own sheets, with what they are and their scale over them. */
-export function printDrawing(
-  pieces: readonly Piece[],
-  { paper, heading }: { readonly paper: PaperName; readonly heading: readonly string[] },
-): void {
+export function printDrawing(pieces: readonly Piece[], { paper, heading, unfinished }: Printed): void {
   const sheets = pieces.flatMap((piece) => {
     const [widthPx, heightPx] = [Number(piece.attrs['width']), Number(piece.attrs['height'])];
     const laid = onPaper({ widthPx, heightPx }, scaleIn(piece), paper, gapsIn(piece));
@@ -98,7 +104,13 @@ export function printDrawing(
       return h(
         'div',
         { class: 'alone-sheet' },
-        h('p', {}, h('b', {}, heading[0] ?? ''), ` ${heading.slice(1).join(' ')}. ${part}${laid.words}.`),
+        h(
+          'p',
+          {},
+          h('b', {}, heading[0] ?? ''),
+          ` ${heading.slice(1).join(' ')}. ${part}${laid.words}.`,
+          unfinished !== '' && ` ${unfinished}`,
+        ),
         toDom(window, document),
       );
     });

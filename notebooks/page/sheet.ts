@@ -47,6 +47,8 @@ export interface PageSpec {
   readonly hint?: HtmlChild;
   /** What stands at the foot of every printed sheet after the title, e.g. the reference of a study and its fingerprint. */
   readonly foot?: () => readonly string[];
+  /** What is said of all that leaves the page, printed or as a file, before everything on it is there; '' once it is. */
+  readonly unfinished?: () => string;
 }
 
 export interface SheetOptions {
@@ -290,7 +292,8 @@ export function sheet(
     },
 
     mount(root, spec) {
-      saveTables(element);
+      const { unfinished = () => '' } = spec;
+      saveTables(element, unfinished);
       ({ sections } = spec);
       known = hosts().map(({ station, shows, owns }) => ({ name: station, shows, owns }));
       const { hint = usualHint } = spec;
@@ -308,7 +311,9 @@ export function sheet(
       };
       for (const host of hosts()) {
         const { element: cell } = host;
-        cell.querySelector(':scope > .body')?.after(drawingActions(cell, heading, onFullSheet(host)));
+        cell
+          .querySelector(':scope > .body')
+          ?.after(drawingActions(cell, heading, onFullSheet(host), unfinished));
       }
       if (beside !== undefined) {
         const stations = known.map(({ name }) => name);
@@ -344,7 +349,7 @@ export function sheet(
       );
       skip();
       const { foot = () => [] } = spec;
-      const stopFoot = runningFoot(() => [heading(), ...foot()]);
+      const stopFoot = runningFoot(() => [heading(), ...foot(), unfinished()]);
       window.addEventListener('beforeprint', onPaper);
       window.addEventListener('afterprint', onScreen);
       stops.push(lines.end, stopFoot, bringTabbedToSight(), () => {

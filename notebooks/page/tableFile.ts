@@ -1,4 +1,4 @@
-import { saveFile } from './files.ts';
+import { fileNameOf, saveFile } from './files.ts';
 
 /** Cells of a table as they are read, row by row, heads first. */
 function rowsOf(table: HTMLTableElement): string[][] {
@@ -22,13 +22,16 @@ async function csvOf(table: HTMLTableElement): Promise<string> {
   ).toCSV();
 }
 
-/** Makes the action 'Save as CSV' under the tables of a page hand over the table it stands under. */
-export function saveTables(page: HTMLElement): void {
+/**
+ * Makes the action 'Save as CSV' under the tables of a page hand over the table it stands under.
+ * @param unfinished what is said before everything on the page is there; the name of the file says that it is so
+ */
+export function saveTables(page: HTMLElement, unfinished: () => string): void {
   page.addEventListener('click', (event) => {
     const action = event.target instanceof Element ? event.target.closest('button.csv') : null;
     const table = action?.parentElement?.querySelector('table');
     if (!table) return;
-    const name = (table.caption?.textContent ?? 'table').toLowerCase().replace(/[^a-z0-9]+/gu, '-');
+    const name = fileNameOf(table.caption?.textContent ?? 'table', unfinished());
     void csvOf(table).then((text) => saveFile(`${name}.csv`, text, 'text/csv'));
   });
 }

@@ -44,6 +44,11 @@ export interface SlowRun {
   readonly signal: AbortSignal;
   /** Tells how far the run has come; words after the abort are ignored. */
   readonly report: (progress: Progress) => void;
+  /**
+   * Hands on what there is of the result so far, a value of the type that the run ends with, which the compiler cannot tell
+   * here; the cell stays pending. After the end or the abort it is ignored.
+   */
+  readonly handOn: (part: unknown) => void;
 }
 
 /** `latest`: a new run aborts the old one. `progress`: the running one finishes and only the newest waits. */

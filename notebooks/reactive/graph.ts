@@ -8,7 +8,7 @@ import { showing, stateOf } from './show.ts';
 import { slowNode } from './slowNode.ts';
 import type { AnySlowRun } from './slowNode.ts';
 
-/** A graph of cells; `SPEC.md` states the rules G1 to G14 it keeps. */
+/** A graph of cells; `SPEC.md` states the rules G1 to G15 it keeps. */
 export type Graph = ReturnType<typeof graph>;
 
 interface Options<T> {

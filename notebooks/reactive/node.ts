@@ -74,14 +74,15 @@ export function carriedLife(life: Life, used: readonly Outcome<unknown>[] | unde
   if (used === undefined) return life;
   if (isLived(above.life) && isMadeFrom(used, above)) return above.life;
   const ends = above.lives.map(({ since }, i) => (used[i] === above.outcomes[i] ? Infinity : since - 1));
-  return { since: life.since, until: Math.min(life.until, ...ends) };
+  return { ...life, until: Math.min(life.until, ...ends) };
 }
 
 /** Puts outcome and life into the node; an outcome that stays keeps its age, and when both stay nobody is stirred. */
 export function putMark<T>(node: Node<T>, outcome: Outcome<T>, life: Life): void {
   const before = node.mark.peek();
   const joined = before.outcome === outcome ? joinLives(before.life, life) : life;
-  const same = before.life.since === joined.since && before.life.until === joined.until;
+  const { since, until, isPart = false } = before.life;
+  const same = since === joined.since && until === joined.until && isPart === (joined.isPart ?? false);
   if (before.outcome !== outcome || !same) node.mark.value = { outcome, life: joined };
 }
 

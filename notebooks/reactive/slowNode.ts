@@ -1,5 +1,5 @@
 import type { Equal, Policy, SlowRun } from './cell.ts';
-import { isLived } from './life.ts';
+import { asPart, isLived } from './life.ts';
 import type { Life } from './life.ts';
 import { failure, outcomeOf } from './outcome.ts';
 import type { Outcome } from './outcome.ts';
@@ -29,18 +29,23 @@ export function slowNode<T>(
   const keys = Object.keys(uses);
   const node = blankNode(name, 'slow', Object.values(uses), equal);
   let used: readonly Outcome<unknown>[] | undefined;
+  /** Whether the value is what a run has handed on before its end. */
+  let isPart = false;
   let job: Job | undefined;
 
   const advance = (): void => {
     const above = lookUp(node.uses);
     const { outcome, life } = node.mark.peek();
-    putMark(node, outcome, carriedLife(life, used, above));
+    const carried = carriedLife(life, used, above);
+    putMark(node, outcome, isPart ? asPart(carried) : carried);
     if (job) job.life = carriedLife(job.life, job.used, above);
-    if (!isLived(above.life) || isMadeFrom(used, above) || isMadeFrom(job?.used, above)) return;
+    const isMade = !isPart && isMadeFrom(used, above);
+    if (!isLived(above.life) || isMade || isMadeFrom(job?.used, above)) return;
     const failed = failureAbove(above);
     if (failed) {
       abort();
       used = above.outcomes;
+      isPart = false;
       putMark(node, failure(outcome, failed.error, failed.raisedBy), above.life);
     } else if (!job || policy === 'latest') {
       abort();
@@ -51,18 +56,32 @@ export function slowNode<T>(
   const start = (above: Above): void => {
     const mine: Job = { used: above.outcomes, controller: new AbortController(), life: above.life };
     job = mine;
+    const put = (produce: () => T, life: Life): void => {
+      used = mine.used;
+      putMark(node, outcomeOf(name, node.mark.peek().outcome, produce, equal), life);
+    };
     const finish = (produce: () => T): void => {
       if (job !== mine) return;
       resume(() => {
         endJob();
-        used = mine.used;
-        putMark(node, outcomeOf(name, node.mark.peek().outcome, produce, equal), mine.life);
+        isPart = false;
+        put(produce, mine.life);
       });
     };
     const handed: SlowRun = {
       signal: mine.controller.signal,
       report: (progress) => {
         if (job === mine) node.progress.value = progress;
+      },
+      handOn(part) {
+        // In a turn of its own: a run may hand something on while it is being started, inside a pass.
+        queueMicrotask(() => {
+          if (job !== mine) return;
+          resume(() => {
+            isPart = true;
+            put(() => part as T, asPart(mine.life));
+          });
+        });
       },
     };
     new Promise<T>((resolve) => resolve(run(valuesAbove(keys, above), handed))).then(

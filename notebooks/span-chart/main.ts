@@ -1,13 +1,16 @@
+import { reachFigure } from '../../lib/index.ts';
 import { length } from '../format.ts';
 import { h } from '../html.ts';
-import { pagesFrom, sheet } from '../page/index.ts';
+import { pagesFrom, sheet, whereFrom } from '../page/index.ts';
 import { graph as newGraph } from '../reactive/index.ts';
+import { reacher } from '../worker/index.ts';
 import { answerCells } from './answerCells.ts';
 import { builtSection } from './builtSection.ts';
 import { depthSection } from './depthSection.ts';
 import { disagreementSection } from './disagreementSection.ts';
 import { askedSpanM, readQuestion, writeQuestion } from './question.ts';
 import { questionSentence } from './questionSentence.ts';
+import { reachDesk } from './reachDesk.ts';
 import { sourceSection } from './sourceSection.ts';
 import { spanSection } from './spanSection.ts';
 import { answerWords } from './words.ts';
@@ -16,6 +19,7 @@ const { question, problems } = readQuestion(location.search);
 const graph = newGraph();
 const cells = answerCells(graph, question);
 const { asked, answer } = cells;
+const desk = reachDesk(graph, asked, reacher());
 const page = sheet(graph);
 
 let latest = question;
@@ -29,7 +33,7 @@ const sentence = questionSentence({
   change: () => history.replaceState(null, '', writeQuestion(latest)),
 });
 
-page.mount(document.body, {
+const element = page.mount(document.body, {
   bar: {
     pages: pagesFrom('span-chart'),
     tools: [
@@ -60,10 +64,18 @@ page.mount(document.body, {
     ],
   },
   sections: [
-    spanSection(page, graph, cells),
+    spanSection(page, graph, cells, desk),
     depthSection(page, cells),
     disagreementSection(page, graph, cells),
     builtSection(page, cells),
     sourceSection(page),
   ],
+});
+
+// Of the figures of this page limiting spans are worked out; the others are published and say their sources beside them.
+const where = whereFrom(element, (path) => (path.startsWith('reach/') ? '1+030' : undefined));
+graph.watch(desk.limits, (state) => {
+  if (state.state !== 'ready') return;
+  const { value } = state;
+  where.set(value.length === 0 ? null : (path) => reachFigure(value, path), false);
 });

@@ -1,4 +1,5 @@
-import { spanAxis, spanChart, spanTable, type SpanChartInput } from '../charts/spanChart.ts';
+import { limitM, reachPath, type FormReach } from '../../lib/index.ts';
+import { spanAxis, spanChart, spanTable, type SpanChartInput, type SpanRow } from '../charts/spanChart.ts';
 import { spanRows } from '../charts/spanRows.ts';
 import { tableBehind } from '../charts/table.ts';
 import { countWords, length } from '../format.ts';
@@ -6,7 +7,19 @@ import { h, type HtmlChild } from '../html.ts';
 import { choiceInput, type LineSection, type Sheet } from '../page/index.ts';
 import type { Graph } from '../reactive/index.ts';
 import { orderOf, type AnswerCells, type Order } from './answerCells.ts';
+import { type ReachDesk } from './reachDesk.ts';
+import { reachTable } from './reachTable.ts';
 import { firstTurnWords } from './words.ts';
+
+/** The rows with the limiting spans that have been worked out. */
+const withLimits = (rows: readonly SpanRow[], reaches: readonly FormReach[]): SpanRow[] =>
+  rows.map((row) => {
+    const reach = reaches.find(({ form }) => form === row.form);
+    const spanM = reach ? limitM(reach) : null;
+    if (spanM === null || !reach?.fails) return row;
+    const figure = reachPath(row.form, 'spanM');
+    return { ...row, limit: { spanM, words: reach.fails.check.label, figure } };
+  });
 
 /** Narrower than this, forms that are out are folded away. */
 const FOLD_PX = 680;
@@ -34,8 +47,9 @@ function charts(input: SpanChartInput, fold: { isOpen: boolean }): HtmlChild {
 }
 
 /** Section 1: every form against the span. */
-export function spanSection(page: Sheet, graph: Graph, cells: AnswerCells): LineSection {
+export function spanSection(page: Sheet, graph: Graph, cells: AnswerCells, desk: ReachDesk): LineSection {
   const { answer, order } = cells;
+  const { reaches, limits } = desk;
   const fold = { isOpen: false };
   const listedBy = choiceInput<Order>({
     label: 'order of the forms',
@@ -63,10 +77,10 @@ export function spanSection(page: Sheet, graph: Graph, cells: AnswerCells): Line
         title: 'How far forms span',
         wide: true,
         long: true,
-        shows: { answer, order },
+        shows: { answer, order, limits },
         owns: [answer],
         body: (v, room) => {
-          const rows = spanRows(v.answer, orderOf(v.answer, v.order));
+          const rows = withLimits(spanRows(v.answer, orderOf(v.answer, v.order)), v.limits);
           const input: SpanChartInput = {
             rows,
             askedM: v.answer.span,
@@ -93,6 +107,27 @@ export function spanSection(page: Sheet, graph: Graph, cells: AnswerCells): Line
             'p',
             { class: 'source' },
             'Grey: US National Bridge Inventory 2024, bridges of 152 m and more built since 1980, read; dotted where fewer than 20 were built. Six forms are not told apart in that record.',
+          ),
+        ],
+      }),
+      page.cell({
+        station: '1+030',
+        title: 'Limiting spans of this deck',
+        wide: true,
+        long: true,
+        shows: { reaches },
+        owns: [reaches, limits],
+        body: (v) => reachTable(desk, v.reaches),
+        notes: [
+          h(
+            'p',
+            {},
+            'The span from which no depth carries any more, in the published band of depths or to twice as deep, and the check that ends it; what is built is shorter. Sized as this tool sizes options: on square supports, by the usual method of the form, with side spans of ordinary proportion, lanes of 3.5 m and EN 1991-2 load model 1, the depth of least cost at demo rates. In the chart above it is the red tick in the row of the form.',
+          ),
+          h(
+            'p',
+            {},
+            'Width and curve of the deck count; opening and length do not. A form takes a few seconds; each figure says where it comes from.',
           ),
         ],
       }),

@@ -1,12 +1,24 @@
-import { conclude, formsAsked, optionsOf } from '../../lib/index.ts';
-import type { Appraisal, AppraisedOption, Option, Study } from '../../lib/index.ts';
+import { conclude, formsAsked, formsInParts, optionsOf } from '../../lib/index.ts';
+import type {
+  Appraisal,
+  AppraisedOption,
+  FormId,
+  FormProposals,
+  Option,
+  Outcome,
+  Study,
+} from '../../lib/index.ts';
 import type { Progress, SlowRun } from '../reactive/index.ts';
-import { client, type Client } from './client.ts';
+import type { Call, Client } from './client.ts';
 import type { jobs } from './jobs.ts';
+import { startWorkers } from './startWorkers.ts';
 
 /** Appraises studies off the page's thread. */
 export interface Appraiser {
-  /** The appraisal of a study; can be aborted, tells how far it has come. Fits the run of a slow cell. */
+  /**
+   * The appraisal of a study; can be aborted, tells how far it has come, and hands on what there is of it so far where
+   * somebody takes that. Fits the run of a slow cell.
+   */
   readonly appraise: (study: Study, run?: Partial<SlowRun>) => Promise<Appraisal>;
   /** Options of a study as they are given, worked out and priced, in their order; without those that cannot be. */
   readonly workOut: (
@@ -20,83 +32,105 @@ export interface Appraiser {
   readonly end: () => void;
 }
 
-/** More workers than this have too little to do each. */
-const MOST = 4;
+/** Rounds of work that a part of the forms takes: rows of the cost tables, arrangements, options. */
+const ROUNDS = 3;
 
-/** How far one of the rounds of an appraisal has come, of several workers together. */
-function progressOf(round: number, rounds: number, parts: readonly (Progress | undefined)[]): Progress {
-  const share = parts.reduce((sum, part) => sum + (part && part.of > 0 ? part.done / part.of : 0), 0);
-  const what = parts.findLast((part) => part !== undefined)?.what ?? '';
-  return { done: Math.round((100 * (round + share / parts.length)) / rounds), of: 100, what };
+/** Adds up how far the shares of the work have come, each told under a name of its own and with its weight in the whole. */
+function progressOf(report: SlowRun['report'] | undefined) {
+  const told = new Map<string, number>();
+  let said = '';
+  return (name: string, weight: number, { done, of, what }: Progress): void => {
+    told.set(name, of > 0 ? (weight * done) / of : 0);
+    said = what === '' ? said : what;
+    const sum = [...told.values()].reduce((all, share) => all + share, 0);
+    report?.({ done: Math.round(100 * sum), of: 100, what: said });
+  };
 }
 
 /**
  * Appraises with several workers: together they size the rows of the cost tables, then each searches its share of the
  * forms and works out its share of the options. An option keeps its worker, which remembers its designs.
+ *
+ * To whoever takes parts the forms come in parts. All are asked of the workers at once, in turns: what waits for others of
+ * its part goes on with the next one meanwhile, so that the whole comes as soon as at one go.
  * The result is that of `appraise`, whoever did what.
  */
 export function appraiseWith(workers: readonly Client<typeof jobs>[]): Appraiser['appraise'] {
   const of = workers.length;
 
-  return async (study, { signal, report } = {}) => {
-    const forms = formsAsked(study);
-    /** One round: every worker does its part; the first failure gives up the others. */
+  return async (study, { signal, report, handOn } = {}) => {
+    const asked = formsAsked(study);
+    const parts = handOn ? formsInParts(study) : [asked];
+    const failed = new AbortController();
+    const tell = progressOf(report);
+    /** One round of a part: every worker does its share. */
     const round = async <T>(
+      turn: number,
       number: number,
-      part: (worker: Client<typeof jobs>, share: number, run: Partial<SlowRun>) => Promise<T[]>,
+      ask: (worker: Client<typeof jobs>, share: number, call: Call) => Promise<T[]>,
     ): Promise<T[]> => {
-      const failed = new AbortController();
-      const told: (Progress | undefined)[] = workers.map(() => undefined);
-      const done = workers.map((worker, share) =>
-        part(worker, share, {
+      const weight = parts[turn]!.length / (asked.length * ROUNDS * of);
+      const done = workers.map(async (worker, share) => {
+        const name = [turn, number, share].join();
+        const answer = await ask(worker, share, {
+          turn,
           signal: signal ? AbortSignal.any([signal, failed.signal]) : failed.signal,
-          report(progress) {
-            told[share] = progress;
-            report?.(progressOf(number, 3, told));
-          },
-        }),
+          report: (progress) => tell(name, weight, progress),
+        });
+        tell(name, weight, { done: 1, of: 1, what: '' });
+        return answer;
+      });
+      return (await Promise.all(done)).flat();
+    };
+    const search = async (forms: readonly FormId[], turn: number): Promise<FormProposals[]> => {
+      const rows = await round(turn, 0, (worker, share, call) =>
+        worker.call('lay', { study, forms, share: { share, of } }, call),
       );
-      try {
-        return (await Promise.all(done)).flat();
-      } catch (error) {
-        failed.abort(error);
-        throw error;
-      }
+      const found = await round(turn, 1, (worker, share, call) =>
+        worker.call('propose', { study, forms: forms.filter((_, i) => i % of === share), rows }, call),
+      );
+      return found.sort((a, b) => forms.indexOf(a.form) - forms.indexOf(b.form));
     };
 
-    const rows = await round(0, (worker, share, run) =>
-      worker.call('lay', { study, share: { share, of } }, run),
-    );
-    const found = await round(1, (worker, share, run) =>
-      worker.call('propose', { study, forms: forms.filter((_, i) => i % of === share), rows }, run),
-    );
-    found.sort((a, b) => forms.indexOf(a.form) - forms.indexOf(b.form));
-    const registered = optionsOf(study, found);
-    const outcomes = await round(2, (worker, share, run) =>
-      worker.call(
-        'workOut',
-        { study, options: registered.options.filter(({ number }) => number % of === share) },
-        run,
-      ),
-    );
-    return conclude(study, found, registered, outcomes);
+    const searches = parts.map(search);
+    // What fails is told where it is waited for.
+    for (const one of searches) one.catch(() => undefined);
+    const found: FormProposals[] = [];
+    const outcomes: Outcome[] = [];
+    const given = new Set<number>();
+    try {
+      for (const [turn, searching] of searches.entries()) {
+        found.push(...(await searching));
+        const registered = optionsOf(study, found);
+        const options = registered.options.filter(({ number }) => !given.has(number));
+        for (const { number } of options) given.add(number);
+        outcomes.push(
+          ...(await round(turn, 2, (worker, share, call) =>
+            worker.call(
+              'workOut',
+              { study, options: options.filter(({ number }) => number % of === share) },
+              call,
+            ),
+          )),
+        );
+        if (turn === parts.length - 1) return conclude(study, found, registered, outcomes);
+        signal?.throwIfAborted();
+        const part = conclude(study, found, registered, outcomes);
+        if (part.options.length > 0) handOn?.(part);
+      }
+      throw new Error('appraisal: expected forms in at least one part, received none');
+    } catch (error) {
+      failed.abort(error);
+      throw error;
+    }
   };
 }
 
 /**
- * Starts the workers: one processor is left to the page and to the compiler, without which two workers are slower than one.
- * Everything asked of them rejects once one has failed to load or they have been ended.
+ * Starts the workers. Everything asked of them rejects once one has failed to load or they have been ended.
  */
 export function appraiser(): Appraiser {
-  const count = Math.min(MOST, Math.max(1, navigator.hardwareConcurrency - 1));
-  const started = Array.from({ length: count }, () => {
-    const worker = new Worker(new URL('./appraise.worker.ts', import.meta.url), { type: 'module' });
-    const line = client<typeof jobs>(worker);
-    worker.addEventListener('error', (event) =>
-      line.close(new Error(`the worker stopped: ${event.message}`)),
-    );
-    return { worker, line };
-  });
+  const started = startWorkers();
   return {
     appraise: appraiseWith(started.map(({ line }) => line)),
     async workOut(study, options, run) {
@@ -111,10 +145,7 @@ export function appraiser(): Appraiser {
       for (const { line } of started) line.hold(isHeld);
     },
     end() {
-      for (const { worker, line } of started) {
-        worker.terminate();
-        line.close(new Error('the worker was ended'));
-      }
+      for (const one of started) one.end();
     },
   };
 }

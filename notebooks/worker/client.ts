@@ -1,6 +1,12 @@
 import type { SlowRun } from '../reactive/index.ts';
 import type { Answer, ArgOf, Jobs, Line, ResultOf } from './messages.ts';
 
+/** How a job is called. */
+export interface Call extends Partial<Pick<SlowRun, 'signal' | 'report'>> {
+  /** Its work rests while the worker has some of an earlier turn; 0, the first, unless given. */
+  readonly turn?: number;
+}
+
 interface Waiting {
   readonly resolve: (value: unknown) => void;
   readonly reject: (error: unknown) => void;
@@ -16,7 +22,7 @@ export interface Client<J extends Jobs> {
   readonly call: <K extends keyof J & string>(
     job: K,
     arg: ArgOf<J[K]>,
-    run?: Partial<SlowRun>,
+    call?: Call,
   ) => Promise<ResultOf<J[K]>>;
   /** Holds all work before its next slice, or lets it go on; it can be given up all the same. */
   readonly hold: (isHeld: boolean) => void;
@@ -39,7 +45,7 @@ export function client<J extends Jobs>(line: Line): Client<J> {
     else call.reject(data.error instanceof Error ? Object.assign(data.error, data.fields) : data.error);
   });
 
-  const call = (job: string, arg: unknown, { signal, report }: Partial<SlowRun> = {}): Promise<unknown> => {
+  const call = (job: string, arg: unknown, { signal, report, turn = 0 }: Call = {}): Promise<unknown> => {
     const id = (last += 1);
     const stop = (): void => {
       line.postMessage({ id, abort: true });
@@ -49,7 +55,7 @@ export function client<J extends Jobs>(line: Line): Client<J> {
     return new Promise((resolve, reject) => {
       if (closed) throw closed;
       signal?.throwIfAborted();
-      line.postMessage({ id, job, arg });
+      line.postMessage({ id, job, arg, turn });
       waiting.set(id, { resolve, reject, report });
       signal?.addEventListener('abort', stop);
     }).finally(() => signal?.removeEventListener('abort', stop));

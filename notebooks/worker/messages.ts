@@ -8,9 +8,12 @@ export type Jobs = Readonly<Record<string, (arg: never) => Steps<unknown>>>;
 export type ArgOf<J> = J extends (arg: infer A) => Steps<unknown> ? A : never;
 export type ResultOf<J> = J extends (arg: never) => Steps<infer T> ? T : never;
 
-/** What the page says: start a piece of work under a new number, give the one of that number up, hold all or go on. */
+/**
+ * What the page says: start a piece of work under a new number, give the one of that number up, hold all or go on. Work
+ * rests while there is some of an earlier turn.
+ */
 export type Wish =
-  | { readonly id: number; readonly job: string; readonly arg: unknown }
+  | { readonly id: number; readonly job: string; readonly arg: unknown; readonly turn: number }
   | { readonly id: number; readonly abort: true }
   | { readonly hold: boolean };
 

@@ -11,11 +11,11 @@ interface Serving extends Pick<Slicing, 'now' | 'budgetMs' | 'breathe'> {
 }
 
 /**
- * Answers the wishes that come down the line with the jobs given, several at a time by turns. Results move rather
- * than being copied where they can, so a job must not keep arrays that it hands out.
+ * Answers the wishes that come down the line with the jobs given: those of the earliest turn first, several of one turn
+ * side by side. Results move rather than being copied where they can, so a job must not keep arrays that it hands out.
  */
 export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: Serving): void {
-  const live = new Map<number, AbortController>();
+  const live = new Map<number, { readonly controller: AbortController; readonly turn: number }>();
   let isHeld = false;
   let held: (() => void)[] = [];
   const goOn = (): void => {
@@ -23,17 +23,19 @@ export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: S
     held = [];
     for (const resolve of waiting) resolve();
   };
-  /** Lets messages through, and waits while all work is held. */
-  const breathe = async (signal: AbortSignal): Promise<void> => {
+  const isLater = (turn: number): boolean => [...live.values()].some((other) => other.turn < turn);
+  /** Lets messages through, and waits while all work is held or there is some of an earlier turn. */
+  const breathe = async (signal: AbortSignal, turn: number): Promise<void> => {
     await slicing.breathe();
-    while (isHeld && !signal.aborted) await new Promise<void>((resolve) => held.push(resolve));
+    while ((isHeld || isLater(turn)) && !signal.aborted)
+      await new Promise<void>((resolve) => held.push(resolve));
   };
   const say = (answer: Answer, transfer: Transferable[] = []): void => line.postMessage(answer, { transfer });
 
-  const work = async (id: number, job: string, arg: unknown): Promise<void> => {
+  const work = async (id: number, job: string, arg: unknown, turn: number): Promise<void> => {
     const controller = new AbortController();
     const { signal } = controller;
-    live.set(id, controller);
+    live.set(id, { controller, turn });
     try {
       const start = jobs[job];
       if (!start) throw new Error(`job '${job}': expected one of ${Object.keys(jobs).join(', ')}`);
@@ -46,7 +48,7 @@ export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: S
       };
       const value = await sliced(start(arg as never), {
         ...slicing,
-        breathe: () => breathe(signal),
+        breathe: () => breathe(signal, turn),
         signal,
         report,
       });
@@ -55,6 +57,7 @@ export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: S
       if (!signal.aborted) sayError(id, error);
     } finally {
       live.delete(id);
+      goOn();
     }
   };
 
@@ -72,8 +75,8 @@ export function serve(line: Line, jobs: Jobs, { tellEveryMs = 0, ...slicing }: S
 
   line.addEventListener('message', ({ data }: { data: Wish }) => {
     if ('hold' in data) isHeld = data.hold;
-    else if ('abort' in data) live.get(data.id)?.abort();
-    else void work(data.id, data.job, data.arg);
+    else if ('abort' in data) live.get(data.id)?.controller.abort();
+    else void work(data.id, data.job, data.arg, data.turn);
     goOn();
   });
 }

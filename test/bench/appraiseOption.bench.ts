@@ -31,7 +31,6 @@ const cases: readonly (readonly [form: FormId, supportsM: readonly number[], dep
 
 const study = lowFerry();
 const { startM, endM } = study.brief.crossing;
-const forms = cases.map(([form]) => form);
 const laid = workbench(study);
 
 const median = (values: readonly number[]): number => {
@@ -83,14 +82,14 @@ describe('one option to P50', () => {
       origin: 'kept',
     };
     // The tables and draws are laid before anything is timed.
-    finish(appraiseOption(laid, drawn(laid, forms), option));
+    finish(appraiseOption(laid, drawn(laid), option));
     timed(`${form}, depth given, aim 3 ms`, 20, () => {
       const here = workbench(study, forgetful());
-      appraiseOptionAt(here, drawn(here, forms), option, [depthM]);
+      appraiseOptionAt(here, drawn(here), option, [depthM]);
     });
     timed(`${form}, depth sought`, 5, () => {
       const here = workbench(study, forgetful());
-      finish(appraiseOption(here, drawn(here, forms), option));
+      finish(appraiseOption(here, drawn(here), option));
     });
   }
 });

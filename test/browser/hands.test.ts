@@ -74,7 +74,8 @@ describe.each([
     expect(after).toBeGreaterThan(before + 3);
     expect(await page.locator(`${cell} .free`).count()).toBe(0);
     await undoIs('Undo moving a pier');
-    expect(await textOf('[id="3+010"]')).toContain('is kept by hand');
+    // Off the screen it is drawn when the page is idle.
+    await expect.poll(() => textOf('[id="3+010"]')).toContain('is kept by hand');
     await page.getByRole('button', { name: 'Undo', exact: true }).click();
     await settled(page);
     expect(await valueOf('pier/1', cell)).toBe(before);
@@ -286,7 +287,8 @@ describe('by hand', () => {
     );
     await settled(page);
     await undoIs('Undo adding a pier');
-    expect(await textOf('[id="3+010"]')).toContain('is kept by hand');
+    // Off the screen it is drawn when the page is idle.
+    await expect.poll(() => textOf('[id="3+010"]')).toContain('is kept by hand');
     expect(await valueOf('pier/1')).toBeLessThan(await valueOf('pier/2'));
     await handle('pier/1').focus();
     await page.keyboard.press('Delete');
@@ -459,7 +461,8 @@ describe('by hand', () => {
       .click();
     await cell.getByText(asked).waitFor({ state: 'detached' });
     expect(await width.textContent()).toBe('as its cells ask');
-    expect(await textOf('[id="3+010"]')).toContain('is kept by hand');
+    // Off the screen it is drawn when the page is idle.
+    await expect.poll(() => textOf('[id="3+010"]')).toContain('is kept by hand');
   });
 
   it('a form that a rule puts out is worked out anyway, and left out again', async () => {

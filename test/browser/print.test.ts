@@ -42,6 +42,26 @@ describe('the option study on paper', () => {
     expect(foot).toContain(`printed ${String(new Date().getDate())} `);
   });
 
+  it('what can span it and the forms asked for, as a sentence, stand on one sheet', async () => {
+    // A3 across: 297 mm less 24 mm of margins high, 420 mm less 30 mm wide.
+    const [sheetPx, widthPx] = [(273 * 96) / 25.4, Math.floor((390 * 96) / 25.4)];
+    await at.page.setViewportSize({ width: widthPx, height: 900 });
+    await at.page.emulateMedia({ media: 'print' });
+    await beforePrint();
+    const asked = at.page.locator('[id="2+020"]');
+    const said = await asked.innerText();
+    const highPx = await at.page.locator('#s2').evaluate((section) => section.getBoundingClientRect().height);
+    const tables = await asked.locator('table').count();
+    await afterPrint();
+    await at.page.setViewportSize({ width: 1440, height: 900 });
+    expect(said).toContain(
+      'Asked for: composite I, concrete box, truss and cable-stayed. Not asked for: slab,',
+    );
+    expect(tables).toBe(0);
+    expect(highPx).toBeLessThan(sheetPx);
+    expect(highPx).toBeGreaterThan(sheetPx / 2);
+  });
+
   it('prints what puts options out and what asks for caution, each reason once', async () => {
     await beforePrint();
     const rows = at.page.locator('[id="10+020"] .warnings tbody tr');

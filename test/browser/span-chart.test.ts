@@ -159,6 +159,33 @@ describe('a span chart of its own', () => {
     silent(heard);
   });
 
+  it('limiting spans of the deck are worked out on wish, left off, marked in the chart and say where they come from', async () => {
+    const { page, heard } = await site.open('span-chart.html');
+    await settled(page);
+    const cell = page.locator('[id="1+030"]');
+    const row = (form: string): Promise<string> =>
+      cell.locator('.reaches').getByRole('row', { name: form }).innerText();
+    await page.getByRole('button', { name: 'Work all out: limiting spans of this deck' }).click();
+    await cell.getByText('tries').first().waitFor();
+    await page.getByRole('button', { name: 'Leave off: limiting spans of this deck' }).click();
+    await expect.poll(() => cell.innerText()).not.toMatch(/waits|tries/u);
+    await page.getByRole('button', { name: 'work it out: limiting span of this deck, Truss' }).click();
+    await expect.poll(() => row('Truss'), { timeout: 30_000 }).toMatch(/\d{3}\s+end post/u);
+    expect(await row('Cable-stayed')).toContain('work it out');
+    await expect.poll(() => rowOf(page, 'Truss')).toMatch(/carries no more from \d+.m: end post/u);
+    const span = cell.locator('.reaches').getByRole('row', { name: 'Truss' }).locator('.worked').first();
+    expect(await page.locator('[id="1+020"] [data-figure="reach/truss/spanM"]').first().textContent()).toBe(
+      `${await span.textContent()} m`,
+    );
+    await span.click();
+    await cell.getByText('walk and halving').waitFor();
+    // Another deck has limits of its own.
+    await type(page, 'deck width', '20');
+    await expect.poll(() => row('Truss')).toContain('work it out');
+    expect(await page.locator('[id="1+020"] [data-figure^="reach"]').count()).toBe(0);
+    silent(heard);
+  });
+
   it('a length shorter than the opening is refused beside it and the last answer is kept', async () => {
     const { page, heard } = await site.open('span-chart.html');
     await settled(page);

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { byCost } from '../../notebooks/charts/rowHead.ts';
 import { ranking } from '../../notebooks/charts/ranking.ts';
 import { leastSoffit, lowestSoffit, supportChainages } from '../../notebooks/drawing/alongOption.ts';
+import { bracketKey } from '../../notebooks/drawing/barred.ts';
 import { crossing } from '../../notebooks/drawing/crossing.ts';
 import { elevation } from '../../notebooks/drawing/elevation.ts';
 import { pxPerMetre } from '../../notebooks/drawing/scale.ts';
@@ -178,21 +179,40 @@ describe('crossing(input)', () => {
     expect([...elements(small(false))].some(({ attrs }) => attrs['data-handle'] !== undefined)).toBe(false);
   });
 
-  it('puts words of neighbouring brackets that would touch in lines of their own', () => {
+  describe('with brackets so close that their words would touch', () => {
     const zone = site.zones.find(({ hard }) => hard)!;
-    const zones = [0, 12, 24].map((at) => ({
+    const zones = ['Up line', 'Down line', 'Siding'].map((name, i) => ({
       ...zone,
+      name,
       kind: 'railway' as const,
-      fromM: 1300 + at,
-      toM: 1306 + at,
+      fromM: 1300 + 20 * i,
+      toM: 1306 + 20 * i,
     }));
     const close = { ...site, zones, mainOpening: { fromM: 1300, toM: 1306, widthM: 6 } };
-    const piece = crossing({ site: close, option: second, obstacles, widthPx: 358 });
-    const bars = [...elements(piece)].find(({ attrs }) => attrs['class'] === 'brackets')!;
-    const lines = [...elements(bars)]
-      .filter(({ tag }) => tag === 'text')
-      .map(({ attrs }) => Number(attrs['y']));
-    expect(new Set(lines).size).toBe(3);
+    const at = (widthPx: number): Piece =>
+      crossing({ site: close, option: second, obstacles, widthPx, scale: 5000 });
+    const lettersOf = (piece: Piece): Piece[] => {
+      const bars = [...elements(piece)].find(({ attrs }) => attrs['class'] === 'brackets')!;
+      return [...elements(bars)].filter(({ tag }) => tag === 'text');
+    };
+
+    it('puts the words in lines of their own', () => {
+      const piece = at(620);
+      expect(new Set(lettersOf(piece).map(({ attrs }) => attrs['y'])).size).toBe(3);
+      expect(bracketKey(piece)).toEqual([]);
+    });
+
+    it('on a hand-held screen puts letters over them and says what they stand for, once', () => {
+      const piece = at(358);
+      expect(lettersOf(piece).map(({ children }) => children[0])).toEqual(['a', 'b', 'c']);
+      expect(new Set(lettersOf(piece).map(({ attrs }) => attrs['y'])).size).toBe(1);
+      expect(bracketKey(piece)).toEqual([
+        { letter: 'a', names: 'Up line' },
+        { letter: 'b', names: 'Down line' },
+        { letter: 'c', names: 'Siding' },
+      ]);
+      expect(wordsOf(piece)).not.toContain('Siding');
+    });
   });
 
   it('draws a site without zones, water, limits or ground classes', () => {

@@ -422,6 +422,107 @@ describe('slow cells', () => {
     await runs[1]!.finish(20);
     expect(g.state(c)).toEqual({ state: 'ready', value: 21 });
   });
+
+  it('[G15] a part goes on to cells below, pending with them, until the run ends', async () => {
+    const g = graph();
+    const { runs, start } = manual<{ a: number }, number>();
+    const a = g.input('a', 1);
+    const b = g.slow('b', { a }, start, { policy: 'latest' });
+    const c = g.cell('c', { b }, ({ b: x }) => x + 1);
+    const settled = vi.fn<() => void>();
+    await turn();
+    runs[0]!.run.handOn(10);
+    await turn();
+    void g.settled().then(settled);
+    expect(g.state(b)).toEqual({ state: 'pending', value: 10 });
+    expect(g.state(c)).toEqual({ state: 'pending', value: 11 });
+    runs[0]!.run.handOn(20);
+    await turn();
+    expect(g.state(c)).toEqual({ state: 'pending', value: 21 });
+    expect(settled).not.toHaveBeenCalled();
+    await runs[0]!.finish(30);
+    expect(g.state(c)).toEqual({ state: 'ready', value: 31 });
+    expect(settled).toHaveBeenCalledTimes(1);
+  });
+
+  it('[G15] a part meets another value of its age in one view, and neither an older nor a newer one', async () => {
+    const g = graph();
+    const { runs, start } = manual<{ a: number }, number>();
+    const states: unknown[] = [];
+    const a = g.input('a', 1);
+    const b = g.slow('b', { a }, start, { policy: 'latest' });
+    g.view({ a, b }, (state) => states.push(state));
+    await turn();
+    runs[0]!.run.handOn(10);
+    await turn();
+    g.batch(() => g.set(a, 2));
+    runs[0]!.run.handOn(11);
+    await turn();
+    runs[1]!.run.handOn(20);
+    await runs[1]!.finish(21);
+    expect(states).toEqual([
+      { state: 'pending' },
+      { state: 'pending', value: { a: 1, b: 10 } },
+      { state: 'pending', value: { a: 2, b: 20 } },
+      { state: 'ready', value: { a: 2, b: 21 } },
+    ]);
+  });
+
+  it('[G15] a result equal to its last part makes ready what was made from it, which does not run again', async () => {
+    const g = graph();
+    const { runs, start } = manual<{ a: number }, number>();
+    const ran = vi.fn<(x: number) => number>((x) => x + 1);
+    const a = g.input('a', 1);
+    const b = g.slow('b', { a }, start, { policy: 'latest' });
+    const c = g.cell('c', { b }, ({ b: x }) => ran(x));
+    const d = g.slow('d', { c }, ({ c: x }) => 2 * x, { policy: 'latest' });
+    await turn();
+    runs[0]!.run.handOn(10);
+    await turn();
+    expect(g.state(d)).toEqual({ state: 'pending', value: 22 });
+    await runs[0]!.finish(10);
+    expect(g.state(c)).toEqual({ state: 'ready', value: 11 });
+    expect(g.state(d)).toEqual({ state: 'ready', value: 22 });
+    expect(ran).toHaveBeenCalledTimes(1);
+  });
+
+  it('[G15] a failure after a part keeps the part; a run that is started hands on at once', async () => {
+    const g = graph();
+    const a = g.input('a', 1);
+    const b = g.slow(
+      'b',
+      { a },
+      async ({ a: x }, { handOn }): Promise<number> => {
+        handOn(10 * x);
+        await turn();
+        throw new Error('no more');
+      },
+      { policy: 'latest' },
+    );
+    await g.settled();
+    expect(g.state(b)).toMatchObject({ state: 'failed', raisedBy: 'b', value: 10 });
+    g.batch(() => g.set(a, 2));
+    expect(g.state(b)).toEqual({ state: 'pending', value: 10 });
+    await g.settled();
+    expect(g.state(b)).toMatchObject({ state: 'failed', value: 20 });
+  });
+
+  it('[G15] what an aborted run left is never ready', async () => {
+    const g = graph();
+    const { runs, start } = manual<{ a: number }, number>();
+    const a = g.input('a', 2);
+    const b = g.cell('b', { a }, half);
+    const c = g.slow('c', { b }, ({ b: x }, run) => start({ a: x }, run), { policy: 'latest' });
+    await turn();
+    runs[0]!.run.handOn(10);
+    await turn();
+    g.batch(() => g.set(a, 4));
+    g.batch(() => g.set(a, 2));
+    expect(g.state(c)).toEqual({ state: 'pending', value: 10 });
+    expect(runs).toHaveLength(3);
+    await runs[2]!.finish(11);
+    expect(g.state(c)).toEqual({ state: 'ready', value: 11 });
+  });
 });
 
 describe('states and failures', () => {

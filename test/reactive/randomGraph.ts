@@ -11,6 +11,8 @@ export interface RandomCell {
   readonly coarse: number;
   /** Remainder at which the cell fails, or -1 for never. */
   readonly failsAt: number;
+  /** Whether a slow one hands its result on as a part before its run ends. */
+  readonly handsOn: boolean;
 }
 
 export interface RandomGraph {
@@ -30,6 +32,7 @@ export function randomGraph(most: number, slow: boolean): Arbitrary<RandomGraph>
     factor: fc.integer({ min: 1, max: 3 }),
     coarse: fc.constantFrom(2, 3, 7, 1000),
     failsAt: fc.constantFrom(-1, -1, -1, 1),
+    handsOn: fc.boolean(),
   });
   return fc
     .record({

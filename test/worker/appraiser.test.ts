@@ -1,6 +1,6 @@
 import { afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { appraise, memory } from '../../lib/index.ts';
-import type { Appraisal, Study } from '../../lib/index.ts';
+import type { Appraisal, FormId, Study } from '../../lib/index.ts';
 import type { Progress } from '../../notebooks/reactive/index.ts';
 import { appraiseWith } from '../../notebooks/worker/appraiser.ts';
 import { client } from '../../notebooks/worker/client.ts';
@@ -42,6 +42,59 @@ describe('appraiseWith', () => {
     expect(told.length).toBeGreaterThan(3);
     const done = told.map((progress) => progress.done / progress.of);
     expect(done).toEqual([...done].sort((a, b) => a - b));
+  });
+
+  it('in parts comes to the same, and each part is what the whole says of its forms', async () => {
+    const told: Progress[] = [];
+    const parts: Appraisal[] = [];
+    const result = await appraiseWith(lines)(lowFerry(), {
+      report: (progress) => told.push(progress),
+      handOn: (part) => parts.push(part as Appraisal),
+    });
+    expect(result).toEqual(whole);
+    expect(result.toCome).toEqual([]);
+    expect(parts).toHaveLength(1);
+    const [{ options, toCome, dropped, droppedCounts, register, standing }] = parts as [Appraisal];
+    expect(toCome).toEqual(['truss', 'cable-stayed']);
+    const isThere = ({ form }: { readonly form: FormId }): boolean => !toCome.includes(form);
+    expect(options.length).toBeGreaterThan(2);
+    expect(options).toEqual(whole.options.filter(isThere));
+    expect(dropped).toEqual(whole.dropped.filter(isThere));
+    expect(droppedCounts).toEqual(whole.droppedCounts.filter(isThere));
+    expect(register).toEqual(whole.register.filter(isThere));
+    for (const { number } of options) {
+      for (const other of options)
+        expect(standing.odds[number]![other.number]).toBe(whole.standing.odds[number]![other.number]);
+    }
+    const done = told.map((progress) => progress.done / progress.of);
+    expect(done).toEqual([...done].sort((a, b) => a - b));
+    expect(done.at(-1)).toBe(1);
+  });
+
+  it('given up after a part it hands on no other', async () => {
+    const controller = new AbortController();
+    const parts: unknown[] = [];
+    const given = appraiseWith(lines)(lowFerry(), {
+      signal: controller.signal,
+      handOn(part) {
+        parts.push(part);
+        controller.abort(new Error('another edit'));
+      },
+    });
+    await expect(given).rejects.toThrow('another edit');
+    for (let i = 0; i < 20; i += 1) await turnOfTheLoop();
+    expect(parts).toHaveLength(1);
+  });
+
+  it('a number that a form still to come has had is not retired by a part', async () => {
+    const study = lowFerry();
+    const { register } = whole;
+    const parts: Appraisal[] = [];
+    const numbered = { ...study, options: { ...study.options, register } };
+    const result = await appraiseWith(lines)(numbered, { handOn: (part) => parts.push(part as Appraisal) });
+    expect(result).toEqual(appraise(numbered, left));
+    expect(parts.map(({ retired }) => retired)).toEqual([[]]);
+    expect(parts[0]!.register).toEqual(register);
   });
 
   it('an option kept by hand is worked out though its form is not asked for', async () => {

@@ -107,6 +107,25 @@ describe('client and serve', () => {
     expect(log.steps).toEqual([]);
   });
 
+  it('call(job, arg, {turn}) rests while there is work of an earlier turn, whoever came first', async () => {
+    const later = page.call('count', { name: 'later', to: 90 }, { turn: 1 });
+    await quiet();
+    const begun = log.steps.length;
+    expect(begun).toBeGreaterThan(0);
+    expect(begun).toBeLessThan(90);
+    const controller = new AbortController();
+    const first = page.call('count', { name: 'first', to: 5 });
+    const given = page.call('count', { name: 'given up', to: 1e6 }, { signal: controller.signal });
+    await first;
+    await quiet();
+    // What was on its way when the others came may end its slice.
+    expect(log.steps.slice(begun + 1)).not.toContain('later');
+    controller.abort();
+    await expect(given).rejects.toThrow();
+    expect(await later).toBe(90);
+    expect(log.steps.filter((name) => name === 'later')).toHaveLength(90);
+  });
+
   it('hold(true) holds all work before its next slice, hold(false) lets it go on', async () => {
     const promise = page.call('count', { name: 'a', to: 30 });
     await turnOfTheLoop();

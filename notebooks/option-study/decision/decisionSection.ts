@@ -20,10 +20,10 @@ export function decisionSection(
 ): LineSection {
   const { appraisal } = cells;
   const { decision } = store.slices;
-  /** The last appraisal, which need not be of the study as it is now. */
+  /** The last whole appraisal, which need not be of the study as it is now: nothing is decided on some of the forms. */
   const last = (): Appraisal | null => {
     const state = graph.state(appraisal);
-    return 'value' in state ? state.value : null;
+    return 'value' in state && state.value.toCome.length === 0 ? state.value : null;
   };
   const now = (): Appraisal | null => (graph.state(appraisal).state === 'ready' ? last() : null);
   const record = (): void => {
@@ -100,7 +100,8 @@ export function decisionSection(
         'div',
         { class: 'decision' },
         page.live({ decision, appraisal }, (v) => {
-          const since = v.decision === null ? [] : sinceIssued(v.decision, v.appraisal);
+          const isWhole = v.appraisal.toCome.length === 0;
+          const since = v.decision !== null && isWhole ? sinceIssued(v.decision, v.appraisal) : [];
           return (
             since.length > 0 &&
             h('span', { class: 'caution since' }, h('b', {}, 'Changed since.'), ` ${since.join(' ')}`)
