@@ -1,5 +1,5 @@
-import { onGrid } from './depthGrid.ts';
-import { formModule } from '../forms/index.ts';
+import { onGrid, stepsPerM } from './depthGrid.ts';
+import { carries, formModule } from '../forms/index.ts';
 import type {
   Design,
   MadeOption,
@@ -183,12 +183,37 @@ function atDepths(bench: Workbench, option: MadeOption, depthsM: readonly number
   return remembered(bench.keptHere.atDepth, key, () => workAt(bench, option, depthsM));
 }
 
-/** Depths of all units, m, when the main unit has the one given: approaches have theirs of least deck cost. */
+/** An approach that does not carry grows by this factor from one trial to the next, to so many times its first depth. */
+const APPROACH = { stride: 1.06, most: 1.5 } as const;
+
+/**
+ * Depths of all units, m, when the main unit has the one given: approaches have theirs of least deck cost, read off the
+ * table by their longest span, and more where their own pattern of spans asks for it.
+ */
 export function depthsOf(bench: Workbench, option: MadeOption, depthM: number): number[] {
+  const { units } = option;
   const table = bench.tables.tableFor(option);
-  return option.units.map((unit) =>
+  const first = units.map((unit) =>
     unit.role === 'main' ? depthM : onGrid(table.depthM(unit.form, Math.max(...spansOf(unit)))),
   );
+  const usesAt = (depthsM: readonly number[]): number[] =>
+    atDepths(bench, option, depthsM).designs.map(({ limitingCheck }) => limitingCheck.utilisation);
+  let depthsM = first;
+  let uses = usesAt(first);
+  for (;;) {
+    const deeper = depthsM.map((d, k) => {
+      if (units[k]!.role === 'main' || carries(uses[k]!)) return d;
+      const next = onGrid(Math.max(APPROACH.stride * d, d + 1 / stepsPerM(d)));
+      return next > APPROACH.most * first[k]! ? d : next;
+    });
+    if (deeper.every((d, k) => d === depthsM[k])) return depthsM;
+    const then = usesAt(deeper);
+    // What a deeper one does not help is not for want of depth.
+    const helped = deeper.map((d, k) => (then[k]! < uses[k]! ? d : depthsM[k]!));
+    if (helped.every((d, k) => d === depthsM[k])) return depthsM;
+    depthsM = helped;
+    uses = usesAt(depthsM);
+  }
 }
 
 /** What an option made one way comes to at one depth of its main unit, m. */

@@ -1,0 +1,35 @@
+import { describe, expect, it } from 'vitest';
+import { carries } from '../../lib/forms/index.ts';
+import { begun, emptyGaps } from '../../notebooks/shelf/newStudy.ts';
+import { answerTo } from './answerTo.ts';
+
+describe('appraise with approaches', () => {
+  it('appraise(wide river) makes approaches as deep as their own spans ask for, not as those of the table', () => {
+    // 183 m between the main piers of a box built by cantilevering; approaches of 18 to 31 m that rise to it.
+    const made = begun({
+      ...emptyGaps,
+      lengthM: 600,
+      crossed: 'river',
+      barredM: 180,
+      headroomM: 12,
+      lanes: 4,
+      widthM: 22,
+    });
+    if (!made.ok) throw new Error(made.why);
+    const { study } = made;
+    const { options } = answerTo({
+      ...study,
+      books: { ...study.books, draws: 300 },
+      options: { ...study.options, forms: ['cantilever-box'] },
+    });
+    const withGirders = options.filter(({ units }) => units.some(({ form }) => form === 'composite-i'));
+    expect(withGirders.length).toBeGreaterThan(0);
+    for (const { units, designs, status } of withGirders) {
+      expect(status).not.toBe('out');
+      designs.forEach(({ limitingCheck }, k) => {
+        if (units[k]!.role === 'approach')
+          expect(carries(limitingCheck.utilisation), limitingCheck.label).toBe(true);
+      });
+    }
+  });
+});
