@@ -35,8 +35,12 @@ function bandChainages(
   option: AppraisedOption | null,
   frame: Frame,
 ): { readonly at: number; readonly x: number }[] {
-  // Levels far below the datum are longer than those above it.
-  const pitch = Math.max(33, ...site.groundZ.map((z) => textWidth(level(z), letters.drawing) + 3));
+  // Levels far below the datum, and those of a hundred and more, are longer than others.
+  const roadsM = option === null ? [] : supportChainages(option).map((x) => roadLevel(option, x));
+  const pitch = Math.max(
+    33,
+    ...[...site.groundZ, ...roadsM].map((z) => textWidth(level(z), letters.drawing) + 3),
+  );
   const ground = site.groundX.filter((x, index) => {
     const before = site.groundX[index - 1];
     const after = site.groundX[index + 1];

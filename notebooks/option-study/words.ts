@@ -109,7 +109,8 @@ export function nextWords(brief: Brief): string {
     return `ask for the headroom over ${preset.name} in writing; ${fixed(preset.clearance.headroomM, 2)} m is a preset.`;
   }
   if (brief.groundStretches.some((stretch) => !stretch.known)) {
-    return 'ask for boreholes at the river piers; the ground is not known and every foundation carries its odds.';
+    const where = brief.waters.length > 0 ? 'river piers' : 'supports';
+    return `ask for boreholes at the ${where}; the ground is not known and every foundation carries its odds.`;
   }
   return 'compare the undominated options and record the decision.';
 }
