@@ -66,7 +66,8 @@ function patternsFor({ site, tables }: Workbench, asked: FormAndMethod): readonl
     const taut = tables.tautSide(asked, site.mainOpening?.widthM ?? 0);
     return [{ ...pattern, twoPylonSide: [least, Math.max(least, Math.min(most, taut))] }];
   }
-  if (site.mainOpening === null) return [pattern];
+  // A deck that is launched comes from an abutment: nothing of another depth may stand in its way.
+  if (site.mainOpening === null || asked.method === 'launch') return [pattern];
   return [pattern, ...alsoPatterns.filter(({ approach }) => openSpans(approach, site.lengthM))];
 }
 

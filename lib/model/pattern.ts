@@ -7,8 +7,8 @@ export type Pattern =
   /** A main unit of one simple span over the obstacle; approach units of another form on either side where needed. */
   | { readonly kind: 'simple-main'; readonly approach: FormId }
   /**
-   * A continuous main unit of three spans, the longest over the obstacle; approach units of another form on either side where
-   * needed. `side` is the side span over the main span.
+   * A continuous main unit of three spans, the longest over the obstacle; approach units on either side where needed, of
+   * another form or of the same one less deep. `side` is the side span over the main span.
    */
   | {
       readonly kind: 'flanked';

@@ -32,4 +32,45 @@ describe('appraise with approaches', () => {
       });
     }
   });
+
+  it('appraise(long crossing) makes composite girders deeper over a long opening than before and behind it', () => {
+    const made = begun({ ...emptyGaps, lengthM: 1200, crossed: 'river', barredM: 100, headroomM: 12 });
+    if (!made.ok) throw new Error(made.why);
+    const { study } = made;
+    const { options } = answerTo({
+      ...study,
+      books: { ...study.books, draws: 300 },
+      options: { ...study.options, forms: ['composite-i'] },
+    });
+    const { units, designs, cost } = options[0]!;
+    expect(units.map(({ role }) => role)).toEqual(['approach', 'main', 'approach']);
+    const [before, main, behind] = designs.map(({ depthM }) => depthM.midspan);
+    expect(before!).toBeLessThan(0.75 * main!);
+    expect(behind!).toBeLessThan(0.75 * main!);
+    // Worth more than the two joints: one depth throughout costs a good deal more.
+    const whole = answerTo({
+      ...study,
+      books: { ...study.books, draws: 300 },
+      options: {
+        ...study.options,
+        forms: ['composite-i'],
+        kept: [
+          {
+            number: 99,
+            form: 'composite-i',
+            method: 'crane',
+            units: [
+              {
+                form: 'composite-i',
+                role: 'main',
+                supportsM: units.flatMap(({ supportsM }, k) => supportsM.slice(k === 0 ? 0 : 1)),
+              },
+            ],
+            depthM: null,
+          },
+        ],
+      },
+    }).options.find(({ number }) => number === 99)!;
+    expect(whole.cost.p50).toBeGreaterThan(1.04 * cost.p50);
+  });
 });

@@ -32,6 +32,8 @@ export const compositeBox: FormModule = {
   family: 'box',
   name: 'Composite box girders',
   pattern: { kind: 'continuous' },
+  // Side spans by common practice, no source.
+  alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.85] }],
   methods: ['crane'],
   choices: ['squareEnds'],
   size: (task) => withSkewEnds(task, size),

@@ -25,6 +25,8 @@ export const compositeI: FormModule = {
   family: 'girder',
   name: 'Composite I-girders',
   pattern: { kind: 'continuous' },
+  // Deeper girders over a long opening than before and behind it; side spans by common practice, no source.
+  alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.85] }],
   methods: ['crane', 'launch'],
   ignoresHeight: true,
   choices: ['haunchRatio', 'substringers'],
