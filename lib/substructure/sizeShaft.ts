@@ -68,13 +68,13 @@ export function sizeShaft(task: ShaftTask): PierShaft {
 
 interface SizedShaft {
   readonly shaft: PierShaft;
-  readonly passes: boolean;
+  readonly stands: boolean;
   /** Concrete, m3 of a solid shaft that costs as much. */
   readonly worthM3: number;
 }
 
 const isCheaper = (one: SizedShaft, other: SizedShaft): boolean =>
-  one.passes === other.passes ? one.worthM3 < other.worthM3 : one.passes;
+  one.stands === other.stands ? one.worthM3 < other.worthM3 : one.stands;
 
 function shaftOf(task: ShaftTask, shape: ShaftShape): SizedShaft {
   const { pier } = substructureData;
@@ -89,8 +89,12 @@ function shaftOf(task: ShaftTask, shape: ShaftShape): SizedShaft {
   });
   const first = leastThickness(shape, task.framed);
   let t = first;
-  while (t < thickest && !passes(task, sectionOf(t))) t = round1(t + pier.stepM);
-  if (task.framed && !passes(task, sectionOf(t))) t = leastBent(task, sectionOf, first);
+  let stands = passes(task, sectionOf(t));
+  while (t < thickest && !stands) {
+    t = round1(t + pier.stepM);
+    stands = passes(task, sectionOf(t));
+  }
+  if (task.framed && !stands) t = leastBent(task, sectionOf, first);
   const head = isOne ? 0 : pier.headDepthM * t * widthM;
   const heightM = isOne ? task.heightM : Math.max(0, task.heightM - pier.headDepthM);
   const area = sectionArea(t, isOne ? widthM : t, hollow) * columns;
@@ -106,7 +110,7 @@ function shaftOf(task: ShaftTask, shape: ShaftShape): SizedShaft {
       concreteM3,
       reinforcementKg: area * heightM * ratio + head * headRatio,
     },
-    passes: passes(task, sectionOf(t)),
+    stands,
     worthM3: shaftPrice(shape) * concreteM3,
   };
 }

@@ -47,7 +47,7 @@ export function stratumOf(site: Site, { fromM, toM, known, classes }: GroundStre
   const place =
     likeliest.bearingDepthM === undefined
       ? level(likely(middleM))
-      : `${likeliest.bearingDepthM.toFixed(1)} down`;
+      : `${likeliest.bearingDepthM.toFixed(1)} m down`;
   const at = `${place}${spread > 0.05 ? ` ± ${spread.toFixed(1)}` : ''}`;
   return {
     fromM,

@@ -10,11 +10,11 @@ describe('nextWords(brief)', () => {
   }));
 
   it('asks for a headroom that is a preset first, then for boreholes where supports stand', () => {
-    const open = confirmed.map((one, i) =>
-      i === 0 && one.clearance ? { ...one, clearance: { ...one.clearance, confirmed: false } } : one,
-    );
-    if (open[0]!.clearance)
-      expect(nextWords({ ...brief, obstacles: open })).toMatch(/^ask for the headroom over/u);
+    const open = confirmed.map((one) => ({
+      ...one,
+      clearance: one.clearance && { ...one.clearance, confirmed: false },
+    }));
+    expect(nextWords({ ...brief, obstacles: open })).toMatch(/^ask for the headroom over/u);
     expect(nextWords({ ...brief, obstacles: confirmed })).toMatch(/^ask for boreholes at the river piers;/u);
     expect(nextWords({ ...brief, obstacles: confirmed, waters: [] })).toMatch(
       /^ask for boreholes at the supports;/u,

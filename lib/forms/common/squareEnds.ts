@@ -22,8 +22,8 @@ export function squareEndLines({ deck, skewDeg }: Pick<UnitTask, 'deck' | 'skewD
   const concreteM3 = deck.widthM * longestM * sill.thicknessM;
   const wedges = `two wedges of ${deck.widthM.toFixed(1)} x ${longestM.toFixed(1)} m`;
   return [
-    measured('deck', 'abutment-concrete', concreteM3, CONCRETE, `${wedges}, ${sill.thicknessM} m thick`),
-    measured('deck', 'reinforcement', concreteM3 * sill.barsKgM3, BARS, `${sill.barsKgM3} kg/m3`),
+    measured('abutments', 'abutment-concrete', concreteM3, CONCRETE, `${wedges}, ${sill.thicknessM} m thick`),
+    measured('abutments', 'reinforcement', concreteM3 * sill.barsKgM3, BARS, `${sill.barsKgM3} kg/m3`),
   ];
 }
 

@@ -220,7 +220,7 @@ function stretchTable(fields: Fields, store: StudyStore, study: Study, index: nu
       h(
         'tr',
         {},
-        ['ground', 'bears at', 'odds, %', ''].map((words) => h('th', { scope: 'col' }, words)),
+        ['ground', 'bears at, m', 'odds, %', ''].map((words) => h('th', { scope: 'col' }, words)),
       ),
     ),
     h(
