@@ -1,6 +1,7 @@
 import { described, type At, type Descriptor, type MeasuredLine } from '../model/index.ts';
 import { foundationAt, footPath } from './foundationFigures.ts';
 import { abutmentBarsPath } from './shaftFigures.ts';
+import { shaftBarsBy } from './sizeShaft.ts';
 
 const path = 'options/:option/supports/:support/foundations/:f/lines/:line/quantity';
 const lineOf = (at: At): MeasuredLine => foundationAt(at).lines[at.index('line')]!;
@@ -30,8 +31,8 @@ function barsOf(at: At): string {
   if (what.endsWith('piles')) return 'data/substructure/piles/barsKgM3';
   if (!what.endsWith('shaft below ground')) return 'data/substructure/footing/barsKgM3';
   if (at.support.kind === 'abutment') return abutmentBarsPath(at);
-  if (at.support.articulation.frame) return 'data/substructure/pier/framedLeafBarsKgM3';
-  return `data/substructure/pier/${at.support.shaft.columns === 2 ? 'columnBarsKgM3' : 'leafBarsKgM3'}`;
+  const { shaft, articulation } = at.support;
+  return `data/substructure/pier/${shaftBarsBy(shaft, articulation.frame !== undefined)}`;
 }
 
 /** Level of water that can reach the pit: ordinary level of the water here, on a flood plain of the first water. */

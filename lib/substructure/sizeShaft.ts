@@ -99,7 +99,7 @@ function shaftOf(task: ShaftTask, shape: ShaftShape): SizedShaft {
   const heightM = isOne ? task.heightM : Math.max(0, task.heightM - pier.headDepthM);
   const area = sectionArea(t, isOne ? widthM : t, hollow) * columns;
   const concreteM3 = area * heightM + head;
-  const ratio = barsKgM3(task, columns, hollow);
+  const ratio = pier[shaftBarsBy(shape, task.framed)];
   const headRatio = substructureData.footing.barsKgM3;
   return {
     shaft: {
@@ -136,12 +136,22 @@ export function shaftInertia(lengthM: number, widthM: number, hollow: boolean): 
   return (widthM * lengthM ** 3 - inner) / 12;
 }
 
-/** Bars per m3 of a shaft. */
-function barsKgM3({ framed }: Pick<ShaftTask, 'framed'>, columns: number, hollow: boolean): number {
-  const { pier } = substructureData;
-  if (framed) return hollow ? pier.framedHollowBarsKgM3 : pier.framedLeafBarsKgM3;
-  if (hollow) return pier.hollowBarsKgM3;
-  return columns === 1 ? pier.leafBarsKgM3 : pier.columnBarsKgM3;
+/** Ratios of bars, by how a shaft is made. */
+type ShaftBars =
+  | 'leafBarsKgM3'
+  | 'columnBarsKgM3'
+  | 'hollowBarsKgM3'
+  | 'framedLeafBarsKgM3'
+  | 'framedHollowBarsKgM3';
+
+/** Which of the ratios for piers the bars of a shaft follow, above ground and below: kg in a m3 of concrete. */
+export function shaftBarsBy(
+  { columns, hollow = false }: { readonly columns: number; readonly hollow?: boolean },
+  framed = false,
+): ShaftBars {
+  if (framed) return hollow ? 'framedHollowBarsKgM3' : 'framedLeafBarsKgM3';
+  if (hollow) return 'hollowBarsKgM3';
+  return columns === 1 ? 'leafBarsKgM3' : 'columnBarsKgM3';
 }
 
 /** One shaft or column of a pier, m. */
@@ -190,7 +200,7 @@ function capacityOf(task: ShaftTask, section: Section, depthM: number, where: 'f
   const { lengthM, widthM, columns, hollow } = section;
   const area = sectionArea(lengthM, widthM, hollow);
   const ownKN = where === 'foot' ? area * columns * task.heightM * concrete.weightKNm3 : 0;
-  const steelM2 = (area * barsKgM3(task, columns, hollow) * pier.verticalShare) / steelKgM3;
+  const steelM2 = (area * pier[shaftBarsBy(section, task.framed)] * pier.verticalShare) / steelKgM3;
   return bendingCapacity(area, depthM, steelM2, Math.max(0, task.permanentKN + ownKN) / columns);
 }
 

@@ -9,7 +9,15 @@ import { scourDepth, settingAt } from './setting.ts';
 import { framedReport } from './framedReport.ts';
 import type { FramedShaft } from './framedShaft.ts';
 import { crackedEI } from './pierStiffness.ts';
-import { alongUse, sectionArea, shaftInertia, shaftWidth, sizeShaft, type ShaftTask } from './sizeShaft.ts';
+import {
+  alongUse,
+  sectionArea,
+  shaftBarsBy,
+  shaftInertia,
+  shaftWidth,
+  sizeShaft,
+  type ShaftTask,
+} from './sizeShaft.ts';
 import type { SupportAsk } from './supportAsk.ts';
 import {
   articulationLines,
@@ -94,11 +102,7 @@ export function standPier(site: Site, ask: SupportAsk): Support {
     shaftAreaM2: pylon
       ? 2 * shaft.lengthM * shaft.lengthM
       : sectionArea(shaft.lengthM, columnWidth, hollow) * shaft.columns,
-    shaftBarsKgM3: frame
-      ? pier.framedLeafBarsKgM3
-      : shaft.columns === 2
-        ? pier.columnBarsKgM3
-        : pier.leafBarsKgM3,
+    shaftBarsKgM3: pier[shaftBarsBy(shaft, frame !== undefined)],
     shaftItem: pylon ? 'pylon-concrete' : item,
   };
   const ground = groundUnder(site, ask.chainageM);

@@ -12,7 +12,7 @@ import { proposedProfile } from '../../lib/site/index.ts';
 import { crossing, plainDesign, unitOn } from './crossing.ts';
 
 /** Level and dry, on rock that carries anything, its road so far above the ground, m. */
-const at = (roadM: number, lengthM = 200): Site => ({
+const at = (roadM: number, lengthM = 200, bearingLevelM = -1): Site => ({
   ...crossing,
   waters: [],
   endM: lengthM,
@@ -20,7 +20,7 @@ const at = (roadM: number, lengthM = 200): Site => ({
   groundX: [0, lengthM],
   groundZ: [0, 0],
   groundStretches: [
-    { fromM: 0, toM: lengthM, known: true, classes: [{ ground: 'rock', bearingLevelM: -1, odds: 1 }] },
+    { fromM: 0, toM: lengthM, known: true, classes: [{ ground: 'rock', bearingLevelM, odds: 1 }] },
   ],
   road: { ...crossing.road, startLevelM: roadM, endLevelM: roadM },
 });
@@ -39,9 +39,14 @@ const design = (spansM: readonly number[], supports: readonly number[] = []): De
   ...(supports.length > 0 ? { castIn: castInAt(...supports) } : {}),
 });
 
-function stood(roadM: number, spansM: readonly number[], supports: readonly number[] = []): Support[] {
+function stood(
+  roadM: number,
+  spansM: readonly number[],
+  supports: readonly number[] = [],
+  bearingLevelM = -1,
+): Support[] {
   const places = spansM.reduce<number[]>((x, span) => [...x, x.at(-1)! + span], [0]);
-  const site = at(roadM, places.at(-1));
+  const site = at(roadM, places.at(-1), bearingLevelM);
   const profile: RoadProfile = proposedProfile(site);
   return standSupports(site, [unitOn(places, 'cantilever-box')], [design(spansM, supports)], profile);
 }
@@ -215,4 +220,17 @@ describe('combinations at a pier in one with the deck', () => {
     const moved = feet({ ...deck, ...still, pushM: 0.03 }, quake);
     expect(moved.map((one, i) => one > unmoved[i]!)).toEqual([true, true, false, false, false]);
   });
+});
+
+it.each([
+  ['hollow and cast in', 40, true, 220],
+  ['hollow on bearings', 40, false, 155],
+  ['a leaf cast in', 12, true, 350],
+  ['two columns on bearings', 12, false, 200],
+] as const)('a shaft that is %s has below ground the bars that it has above', (_, roadM, isCastIn, kgM3) => {
+  const [, pier] = stood(roadM, [50, 100, 50], isCastIn ? [1, 2] : [], -4);
+  const below = pier!.foundations[0]!.lines.filter(({ what }) => what.endsWith('shaft below ground'));
+  const [concrete, bars] = below.map(({ quantity }) => quantity);
+  expect(below.map(({ item }) => item)).toEqual([expect.stringMatching(/concrete$/u), 'reinforcement']);
+  expect(bars! / concrete!).toBeCloseTo(kgM3, 9);
 });
