@@ -109,6 +109,8 @@ export default defineConfig({
           include: ['test/browser/**/*.test.ts'],
           isolate: false,
           fileParallelism: false,
+          // What lies off the screen is drawn when the page is idle, which on a busy machine takes longer than the usual second.
+          expect: { poll: { timeout: 30_000 } },
           testTimeout: 60_000,
           hookTimeout: 60_000,
         },

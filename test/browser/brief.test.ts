@@ -53,14 +53,14 @@ describe('the brief in prose', () => {
     await page.locator('h1').click();
     await reads(page, 'runs at 2.0 %, rising with the chainage; an unknown length of it may be regraded.');
     await page.locator('[id="4+010"]').scrollIntoViewIfNeeded();
-    await expect.poll(road, { timeout: 15_000 }).toMatch(/takes a curve behind the abutment of \d+/u);
+    await expect.poll(road).toMatch(/takes a curve behind the abutment of \d+/u);
     await type(page, 'length of the end approach, m', '500');
     await page.locator('h1').click();
     await reads(page, '; 500 m of it may be regraded.');
     await undo(page);
     await undo(page);
     await reads(page, 'the existing road runs at a gradient that is not known.');
-    await expect.poll(road, { timeout: 15_000 }).toContain('is not known: no curve is laid');
+    await expect.poll(road).toContain('is not known: no curve is laid');
   });
 
   it('reads as it stands, and follows a choice, an unknown and its undoing', async () => {

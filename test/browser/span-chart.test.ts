@@ -170,7 +170,7 @@ describe('a span chart of its own', () => {
     await page.getByRole('button', { name: 'Leave off: limiting spans of this deck' }).click();
     await expect.poll(() => cell.innerText()).not.toMatch(/waits|tries/u);
     await page.getByRole('button', { name: 'work it out: limiting span of this deck, Truss' }).click();
-    await expect.poll(() => row('Truss'), { timeout: 30_000 }).toMatch(/\d{3}\s+end post/u);
+    await expect.poll(() => row('Truss')).toMatch(/\d{3}\s+end post/u);
     expect(await row('Cable-stayed')).toContain('work it out');
     await expect.poll(() => rowOf(page, 'Truss')).toMatch(/carries no more from \d+.m: end post/u);
     const span = cell.locator('.reaches').getByRole('row', { name: 'Truss' }).locator('.worked').first();
