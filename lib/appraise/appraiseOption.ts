@@ -7,12 +7,13 @@ import { perM2, splitQuantities } from '../takeoff/index.ts';
 import type { Drawn } from './drawn.ts';
 import { optionFacts } from './facts.ts';
 import { remembered } from '../kept.ts';
+import { pricedText } from './pricedText.ts';
 import { requestFor } from './requestFor.ts';
 import { riversCrossed } from './riversCrossed.ts';
 import { hundredMm } from './hundredMm.ts';
 import type { Work } from './work.ts';
 import { workOption } from './cheapestOption.ts';
-import { mainUnit, spareOf, workOptionAt, type Worked } from './workOption.ts';
+import { mainUnit, spareOf, workOptionAt } from './workOption.ts';
 import { benchFor, type Workbench } from './workbench.ts';
 
 /** An option worked out, priced and ruled on, with its cost in every draw. */
@@ -48,13 +49,9 @@ export function appraiseOptionAt(
 }
 
 /** A worked option priced and ruled on; the bench is that of its own abutments. */
-function judged(
-  bench: Workbench,
-  { draws, rates, key }: Drawn,
-  { option: worked, key: made }: Worked,
-): PricedAppraisal {
+function judged(bench: Workbench, { draws, rates, key }: Drawn, worked: WorkedOption): PricedAppraisal {
   const { study, site } = bench;
-  const priced = remembered(bench.keptHere.priced, `${worked.number} ${made} ${key}`, () =>
+  const priced = remembered(bench.kept.priced, `${worked.number} ${key} ${pricedText(worked)}`, () =>
     priceOption(worked, draws, rates, optionError(draws, worked.number)),
   );
   const spare = spareOf(site, worked);

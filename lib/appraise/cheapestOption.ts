@@ -8,6 +8,7 @@ import {
   type Option,
   type Unit,
   type Variant,
+  type WorkedOption,
 } from '../model/index.ts';
 import { onGrid } from './depthGrid.ts';
 import { depthRange } from './depthRange.ts';
@@ -16,7 +17,7 @@ import type { DepthTrial } from './leastCostDepth.ts';
 import type { Work } from './work.ts';
 import type { Workbench } from './workbench.ts';
 import { skewOn, spansOf } from './askedTask.ts';
-import { depthsOf, mainUnit, trialAt, workOptionAt, type Worked } from './workOption.ts';
+import { depthsOf, mainUnit, trialAt, workOptionAt } from './workOption.ts';
 
 /** The table is read off straight lines and knows one pattern of spans: this much more is still looked at. */
 const OVER_DECK_ALONE = 1.15;
@@ -137,7 +138,7 @@ function firstTryM(
  *
  * @throws RangeError where a form cannot be sized for what it is asked
  */
-export function* workOption(bench: Workbench, option: Option): Work<Worked> {
+export function* workOption(bench: Workbench, option: Option): Work<WorkedOption> {
   const main = mainUnit(option.units);
   const first: MadeOption = { ...option, variant: saidOf(option.variant ?? {}) };
   const nearM = bench.tables.tableFor(option).depthM(main.form, Math.max(...spansOf(main)));

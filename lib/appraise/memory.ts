@@ -45,8 +45,6 @@ export interface SiteMemory {
   readonly proposals: Kept<Proposals>;
   /** By arrangement, method, depths and books. */
   readonly atDepth: Kept<AtDepth>;
-  /** By the same, books and draws. */
-  readonly priced: Kept<PricedOption>;
 }
 
 /** One set of draws and the rates put on it so far, by item and the points of the rate. */
@@ -70,6 +68,8 @@ export interface Memory {
   readonly supports: Kept<Support>;
   /** By brief without its budget. */
   readonly sites: Kept<SiteMemory>;
+  /** By number of the option, draws, rates and what is priced of it. */
+  readonly priced: Kept<PricedOption>;
   /** By seed, number, length and odds of the ground. */
   readonly draws: Kept<DrawsMemory>;
 }
@@ -82,11 +82,12 @@ export function memory(): Memory {
     piers: kept(2000),
     supports: kept(2000),
     sites: kept(6),
+    priced: kept(300),
     draws: kept(2),
   };
 }
 
 /** What is kept of one site: nothing yet where it is seen for the first time. */
 export function siteMemory({ sites }: Memory, key: string): SiteMemory {
-  return remembered(sites, key, () => ({ proposals: kept(100), atDepth: kept(400), priced: kept(100) }));
+  return remembered(sites, key, () => ({ proposals: kept(100), atDepth: kept(400) }));
 }

@@ -230,21 +230,12 @@ export function trialAt(bench: Workbench, option: MadeOption, depthM: number): D
   };
 }
 
-/** A worked option and the text of what it was worked out from on its site. */
-export interface Worked {
-  readonly option: WorkedOption;
-  readonly key: string;
-}
-
 /** One option at depths that are given for each of its units, m; see `workOption`. */
-export function workOptionAt(bench: Workbench, option: MadeOption, depthsM: readonly number[]): Worked {
+export function workOptionAt(bench: Workbench, option: MadeOption, depthsM: readonly number[]): WorkedOption {
   const { number, form, method, units, variant = {} } = option;
   const found = atDepths(bench, option, depthsM);
   const { depthM } = found.designs[units.indexOf(mainUnit(units))]!;
-  return {
-    option: { number, form, family: formModule(form).family, method, units, depthM, variant, ...found },
-    key: keyOf(option, depthsM),
-  };
+  return { number, form, family: formModule(form).family, method, units, depthM, variant, ...found };
 }
 
 /** Spare headroom of a worked option, where something has to be kept clear under it. */

@@ -46,7 +46,7 @@ const rate = (item: string, p50: number): RateOverride => ({
 /** Money of an arrangement worked out in full between its own abutments, at mean rates. */
 function inFull(bench: Workbench, { form, method, units }: Arrangement): number {
   const own = benchFor(bench, units);
-  const { option } = finish(
+  const option = finish(
     workOption(own, { number: 1, form, method, units, depthM: null, origin: 'proposed' }),
   );
   return (

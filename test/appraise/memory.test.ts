@@ -7,6 +7,7 @@ import {
   type AppraisedOption,
   type Study,
 } from '../../lib/index.ts';
+import type { Memory } from '../../lib/appraise/memory.ts';
 import { kept } from '../../lib/kept.ts';
 import { lowFerry } from './studies.ts';
 
@@ -112,6 +113,26 @@ describe('appraiseKept', () => {
     expect(option!.units).toEqual(units);
     expect(option!.depthM.midspan).toBeCloseTo(reference.depthM.midspan + 0.1, 9);
     expect(option).toEqual(appraise(edited, left).options.find((one) => one.number === number));
+  });
+
+  it('appraiseKept(edit of the brief) prices anew only what has changed', () => {
+    let priced = 0;
+    const counting: Memory = {
+      ...left,
+      priced: { ...left.priced, put: (key, value) => ((priced += 1), left.priced.put(key, value)) },
+    };
+    const worked = (edited: Study): AppraisedOption => appraiseKept(edited, reference, counting).option!;
+    // Its supports stand as before: only what is said of it may be another.
+    const narrower = worked(withRiver(study, fromM + 1, toM - 1));
+    expect(priced).toBe(0);
+    expect(narrower.cost).toEqual(reference.cost);
+    const { road } = study.brief;
+    const higher = worked({
+      ...study,
+      brief: { ...study.brief, road: { ...road, startLevelM: road.startLevelM + 0.3 } },
+    });
+    expect(priced).toBe(1);
+    expect(higher.cost).not.toEqual(reference.cost);
   });
 
   it('appraiseKept(river widened over a pier) says which stretch and still works the option out', () => {

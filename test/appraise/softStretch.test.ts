@@ -49,8 +49,8 @@ describe('a stretch in which supports had better not stand', { timeout: 60_000 }
       const option = { number: 1, ...asked, units: [free], origin: 'proposed' } as const;
       const plain = workbench(lowFerry(), kept);
       const bench = workbench(withGarden(pierM - 3, pierM + 3, sum), kept);
-      const before = workOptionAt(plain, { ...option, depthM: 2.5 }, [2.5]).option;
-      const after = workOptionAt(bench, { ...option, depthM: 2.5 }, [2.5]).option;
+      const before = workOptionAt(plain, { ...option, depthM: 2.5 }, [2.5]);
+      const after = workOptionAt(bench, { ...option, depthM: 2.5 }, [2.5]);
       const own = after.lines.filter((line) => line.item.startsWith('soft-stretch'));
       expect(own.map((line) => [line.item, line.quantity, line.part, line.support])).toEqual([
         [item, quantity, 'piers', 1],
@@ -63,7 +63,7 @@ describe('a stretch in which supports had better not stand', { timeout: 60_000 }
   it('a support on its edge or an abutment in it costs no more', () => {
     const bench = workbench(withGarden(pierM, pierM + 30, 120_000), kept);
     const option = { number: 1, ...asked, units: [free], origin: 'proposed', depthM: 2.5 } as const;
-    const { lines } = workOptionAt(bench, option, [2.5]).option;
+    const { lines } = workOptionAt(bench, option, [2.5]);
     expect(lines.some((line) => line.item.startsWith('soft-stretch'))).toBe(false);
   });
 });

@@ -79,7 +79,7 @@ const boxOn = (mainM: number, variant?: AskedVariant): Option => {
 };
 
 const workOut = (bench: Workbench, mainM: number, variant?: Variant) => {
-  const { option } = finish(workOption(bench, optionOn(mainM, variant)));
+  const option = finish(workOption(bench, optionOn(mainM, variant)));
   const foundations = option.supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
   return { option, cost: bench.costOf([...option.lines, ...foundations]) };
 };
@@ -123,8 +123,8 @@ describe('workOption(option whose way of making is open)', () => {
 describe('workOption(wide concrete box whose way of making is open)', () => {
   it('rests the wings on struts where they pay', () => {
     const bench = workbench(channel(6, 75));
-    const { option } = finish(workOption(bench, boxOn(75)));
-    const plain = finish(workOption(bench, boxOn(75, {}))).option;
+    const option = finish(workOption(bench, boxOn(75)));
+    const plain = finish(workOption(bench, boxOn(75, {})));
     expect(option.variant).toEqual({ struts: true });
     const [made, level] = [option.designs[0]!, plain.designs[0]!];
     expect(made.figures['cells']).toBeLessThan(level.figures['cells']!);
@@ -134,13 +134,13 @@ describe('workOption(wide concrete box whose way of making is open)', () => {
 
   it('leaves the webs where they are under a shallow box', () => {
     const bench = workbench(channel(5, 50));
-    expect(finish(workOption(bench, boxOn(50))).option.variant).toEqual({});
+    expect(finish(workOption(bench, boxOn(50))).variant).toEqual({});
   });
 });
 
 describe('workOption(option of which some ways of making are open)', () => {
   const bench = workbench(channel(6, 75));
-  const madeOf = (asked?: AskedVariant) => finish(workOption(bench, boxOn(75, asked))).option;
+  const madeOf = (asked?: AskedVariant) => finish(workOption(bench, boxOn(75, asked)));
 
   it('keeps what is asked and makes the rest as costs least', () => {
     const strong = madeOf({ strengthMPa: 50, struts: 'unknown', ribs: 'unknown', transverse: 'unknown' });
@@ -189,7 +189,7 @@ describe('workOption(box on a skew)', () => {
     ...(variant && { variant }),
   });
   const costOf = (bench: Workbench, variant?: AskedVariant) => {
-    const { option } = finish(workOption(bench, arms(variant)));
+    const option = finish(workOption(bench, arms(variant)));
     const foundations = option.supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
     return { option, cost: bench.costOf([...option.lines, ...foundations]) };
   };
@@ -245,10 +245,10 @@ describe('workOption(variant that was chosen)', () => {
 
   it('makes a box as wide, strong and light as asked, and pays lightweight concrete at its own rate', () => {
     const bench = workbench(channel(2, 60));
-    const asked = finish(workOption(bench, boxOn(60, boxAsked))).option;
+    const asked = finish(workOption(bench, boxOn(60, boxAsked)));
     const usual = finish(
       workOption(bench, boxOn(60, { ...boxAsked, light: { densityKgM3: 1800, middleM: [0, 0, 0, 0] } })),
-    ).option;
+    );
     const [light, ordinary] = [asked.designs[0]!, usual.designs[0]!];
     expect(light.task).toMatchObject(boxAsked);
     expect(light.figures).toMatchObject({ webSpacingM: 5, concreteStrengthMPa: 60 });

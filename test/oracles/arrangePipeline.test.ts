@@ -20,7 +20,7 @@ function fullCost(bench: Workbench, form: FormId, method: MethodId, supportsM: r
   const units = [{ form, role: 'main', supportsM } as const];
   // Plain girders: the arrangement is looked at, not how its girders are made.
   const option = { number: 1, form, method, units, depthM: null, variant: {}, origin: 'kept' } as const;
-  const { lines, supports } = finish(workOption(bench, option)).option;
+  const { lines, supports } = finish(workOption(bench, option));
   const feet = supports.flatMap((support) => expectedLines({ ...support, lines: [] }));
   return bench.costOf([...lines, ...feet]);
 }

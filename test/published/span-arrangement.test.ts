@@ -183,7 +183,7 @@ describe('arrange on 500 crossings with lengths of built bridges', { timeout: 12
       lifting += 1;
       const bench = workbench(studyOf(crossing), table.kept);
       const worked = workOptionAt(bench, { number: 1, ...best, depthM, origin: 'proposed' }, [depthM]);
-      worked.option.supports.forEach(({ lines }, i) => {
+      worked.supports.forEach(({ lines }, i) => {
         if (lifts[i]) expect(lines.some(({ item }) => item === 'tie-down')).toBe(true);
       });
     }

@@ -58,11 +58,7 @@ describe('a pier from which a deck is cantilevered', () => {
     const bench = workbench(lowFerry());
     const units = [{ form: 'cantilever-box', role: 'main', supportsM: [1240, 1300, 1410, 1470] }] as const;
     const option = { number: 1, form: 'cantilever-box', method: 'balanced-cantilever', units } as const;
-    const { designs, supports } = workOptionAt(
-      bench,
-      { ...option, depthM: 3, origin: 'proposed' },
-      [3],
-    ).option;
+    const { designs, supports } = workOptionAt(bench, { ...option, depthM: 3, origin: 'proposed' }, [3]);
     const moment = designs[0]!.figures['unbalancedMomentKNm'];
     expect(moment).toBeGreaterThan(0);
     expect(supports.map(({ articulation }) => articulation.buildingKNm)).toEqual([
