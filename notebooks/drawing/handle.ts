@@ -99,7 +99,7 @@ export function handle(spec: HandleSpec, hold: Hold | null, shift: Shift, rightP
       'aria-orientation': isUp ? 'vertical' : undefined,
       ...attrsOf(spec),
     },
-    isHeld && spec.before,
+    isHeld && spec.before && g({ class: 'before' }, spec.before),
     leader(spec, x, y),
     el('rect', {
       class: 'grip',

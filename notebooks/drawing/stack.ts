@@ -8,6 +8,7 @@ import type { Piece } from './piece.ts';
 import type { Scale } from './scale.ts';
 import type { StackInput, StackSheet } from './stackSheet.ts';
 import { narrowBelow } from './stackSheet.ts';
+import { rangeWhileHeld } from './whileHeld.ts';
 import { rowHeight, stackFoot, stackHead, wideStack } from './wideStack.ts';
 
 export type { StackInput } from './stackSheet.ts';
@@ -55,9 +56,16 @@ function layOut(
     canPush,
   );
   const largest = Math.max(0, ...input.options.map((option) => option.cost.p90));
-  const values = spreadValues(
+  const costs = spreadValues(
     input.options.map((option) => option.cost),
     input.budget === null ? [] : [input.budget],
+  );
+  const [low, high] = [Math.min(...costs), Math.max(...costs)];
+  const values = rangeWhileHeld(
+    input.hands?.hold,
+    `costs ${input.prefix ?? ''}`,
+    [low, high],
+    (high - low) / 8 || 1,
   );
   const shared: StackSheet = {
     input,

@@ -16,10 +16,12 @@ import { mainSpan, optionNote, optionTitle } from './optionWords.ts';
 import type { Piece } from './piece.ts';
 import { el, g, num } from './piece.ts';
 import { barredPiers, freeBar, spanChanges, supportFeet, withChange, type InHand } from './supportHandles.ts';
+import { pxPerMetre } from './scale.ts';
 import { scaleBar } from './scaleBar.ts';
 import { sheet } from './sheet.ts';
 import type { StackRow, StackSheet } from './stackSheet.ts';
 import { chosenRow, rowHandles, rowNumber, stackOutset } from './stackSheet.ts';
+import { rangeWhileHeld } from './whileHeld.ts';
 
 function title(shared: StackSheet, option: AppraisedOption, y: number, room: number): Piece {
   const { input } = shared;
@@ -157,13 +159,19 @@ function arrange(
   const { input, scale, ink } = shared;
   const { site } = input;
   const range = levelRange(site, option, scale < 2000);
+  const [bottomM, topM] = rangeWhileHeld(
+    hands?.hold,
+    `levels ${input.prefix ?? ''}`,
+    [range.bottomM, range.topM],
+    HALF_LINE_PX / pxPerMetre(scale),
+  );
   const titleY = TITLE_PX;
   const { isTall } = shared;
   const frame = frameOf(scale, shared.shown, 0, {
-    levelM: range.topM,
+    levelM: topM,
     y: titleY + (isTall ? COST_PX : 12),
   });
-  const dimensionY = Math.max(frame.y(range.bottomM) + (isTall ? 14 : 6), titleY + 70);
+  const dimensionY = Math.max(frame.y(bottomM) + (isTall ? 14 : 6), titleY + 70);
   // On the half lines of the page: a pile that grows by little does not move all that stands below.
   const height = Math.ceil((dimensionY + 12) / HALF_LINE_PX) * HALF_LINE_PX;
   const chainages = supportChainages(option);

@@ -14,6 +14,8 @@ export interface Drag {
   /** It has moved far enough to be a drag. */
   readonly start?: () => void;
   readonly move: (at: DragAt) => void;
+  /** Shows at the end of every frame how far the pointer has come; what `move` has changed may be drawn later. */
+  readonly follow?: (at: DragAt) => void;
   /** Released: what was moved stays. */
   readonly end: () => void;
   /** Escape, or the pointer was taken away: back to where it was. */
@@ -82,7 +84,7 @@ export const whileDragged = (tell: Told): void => void told.add(tell);
  */
 export function draggable(
   element: Element,
-  { may, start, move, end, cancel, tap, byFinger = false }: Drag,
+  { may, start, move, follow, end, cancel, tap, byFinger = false }: Drag,
 ): void {
   element.addEventListener('pointerdown', (event) => {
     const down = event as PointerEvent;
@@ -94,6 +96,12 @@ export function draggable(
     let isDrag = false;
     /** Where it has come to and has not been moved to yet: of several moves in one frame only the last is seen. */
     let waiting: DragAt | null = null;
+    let latest: DragAt = { dx: 0, dy: 0, shift: false, alt: false };
+    let isFollowing = false;
+    const followNow = (): void => {
+      isFollowing = false;
+      if (!signal.aborted) follow?.(latest);
+    };
     const moveNow = (): void => {
       if (waiting === null) return;
       const at = waiting;
@@ -117,7 +125,10 @@ export function draggable(
         start?.();
       }
       if (waiting === null) screenFrames.hand(moveNow);
-      waiting = at;
+      waiting = latest = at;
+      if (isFollowing) return;
+      isFollowing = true;
+      screenFrames.ending(followNow);
     };
     const onUp = (): void => {
       // The last move is no step of a drag any more: what it asks for need not wait for a rest.

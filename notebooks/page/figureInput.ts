@@ -233,8 +233,10 @@ export function figureInput(spec: FigureSpec): FigureInput {
       const fine = Math.max(smallestStep(places), by / 10);
       const moved = Math.round((((dx - anchor.dx) / STEP_PX) * by) / fine) * fine;
       move(movedFigure(anchor.value, moved, spec));
+    },
+    follow({ shift, alt }) {
       write();
-      showScale(by);
+      showScale(stepWith(shift, alt));
     },
     end() {
       isDragged = false;

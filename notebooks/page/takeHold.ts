@@ -1,6 +1,7 @@
 import { h } from '../html.ts';
-import { draggable } from './dragging.ts';
+import { draggable, type DragAt } from './dragging.ts';
 import { readFigure } from './figureText.ts';
+import { screenFrames } from './frames.ts';
 
 /** What the handles of a drawing do; keys are those of the handles. */
 export interface HandDesk {
@@ -91,6 +92,29 @@ export function takeHold(root: Element, desk: HandDesk): HTMLElement {
   let dragged: Handle | null = null;
   /** Where the present gear of the drag began. */
   let anchor = { value: 0, dx: 0, dy: 0, isCoarse: false };
+
+  /** Where a pointer that has come so far brings what is dragged. */
+  const movedTo = ({ across, down }: Handle, { dx, dy }: DragAt): number =>
+    anchor.value + (dx - anchor.dx) * across + (dy - anchor.dy) * down * (anchor.isCoarse ? 1 : LEVEL_GEAR);
+  const draggedTo = (handle: Handle, at: DragAt): number =>
+    within(rounded(movedTo(handle, at), stepOf(handle, { shift: false, alt: at.alt })), handle);
+
+  /** A handle as it is drawn stands where the last answer had it: it is put so much further, but not its old place. */
+  const putAt = (key: string, value: number | null): void => {
+    const element = root.querySelector(`[data-handle="${CSS.escape(key)}"]`);
+    const handle = handleAt(element);
+    if (handle === null) return;
+    const px = (perPx: number): number =>
+      value === null || perPx === 0 ? 0 : Math.round(((value - handle.value) / perPx) * 10) / 10;
+    const [x, y] = [px(handle.across), px(handle.down)];
+    for (const part of handle.element.querySelectorAll(':scope > :not(.before)')) {
+      if (x === 0 && y === 0) part.removeAttribute('transform');
+      else part.setAttribute('transform', `translate(${String(x)} ${String(y)})`);
+    }
+  };
+
+  /** What was dragged stands where it is drawn, once that has been done. */
+  const putBack = (key: string): void => screenFrames.ending(() => putAt(key, null));
 
   const endSteps = (): void => {
     if (stepped === null) return;
@@ -190,25 +214,27 @@ export function takeHold(root: Element, desk: HandDesk): HTMLElement {
       anchor = { value: dragged.value, dx: 0, dy: 0, isCoarse: false };
       desk.take(dragged.key, dragged.value);
     },
-    move({ dx, dy, shift, alt }) {
+    move(at) {
       if (dragged === null || dragged.isTyped || dragged.isLocked) return;
-      const moved = (isCoarse: boolean): number =>
-        anchor.value +
-        (dx - anchor.dx) * dragged!.across +
-        (dy - anchor.dy) * dragged!.down * (isCoarse ? 1 : LEVEL_GEAR);
-      if (shift !== anchor.isCoarse) anchor = { value: moved(anchor.isCoarse), dx, dy, isCoarse: shift };
-      const step = stepOf(dragged, { shift: false, alt });
-      desk.move(dragged.key, within(rounded(moved(shift), step), dragged));
+      const { dx, dy, shift } = at;
+      if (shift !== anchor.isCoarse) anchor = { value: movedTo(dragged, at), dx, dy, isCoarse: shift };
+      desk.move(dragged.key, draggedTo(dragged, at));
+    },
+    follow(at) {
+      if (dragged === null || dragged.isTyped || dragged.isLocked) return;
+      putAt(dragged.key, draggedTo(dragged, at));
     },
     end() {
       if (dragged === null || dragged.isTyped || dragged.isLocked) return;
       dragged.element.classList.remove('held');
       desk.letGo();
+      putBack(dragged.key);
     },
     cancel() {
       if (dragged === null || dragged.isTyped || dragged.isLocked) return;
       dragged.element.classList.remove('held');
       desk.back();
+      putBack(dragged.key);
     },
     tap() {
       if (dragged === null) return;

@@ -65,7 +65,10 @@ function watchPage(): void {
       began = performance.now();
       let before = began;
       let isNew = false;
-      new MutationObserver(() => (isNew = true)).observe(shown, whatever);
+      // What is in hand follows the pointer by itself: what has been drawn anew counts.
+      const isDrawn = ({ target }: MutationRecord): boolean =>
+        !(target instanceof Element) || target.closest('.handle') === null;
+      new MutationObserver((records) => (isNew ||= records.some(isDrawn))).observe(shown, whatever);
       const frame = (now: number): void => {
         if (!isDragging) return;
         longest = Math.max(longest, now - before);
