@@ -8,7 +8,7 @@ import type { Drawn } from './drawn.ts';
 import { optionFacts } from './facts.ts';
 import { remembered } from '../kept.ts';
 import { pricedText } from './pricedText.ts';
-import { requestFor } from './requestFor.ts';
+import { patternOf, requestFor } from './requestFor.ts';
 import { riversCrossed } from './riversCrossed.ts';
 import { hundredMm } from './hundredMm.ts';
 import type { Work } from './work.ts';
@@ -71,7 +71,7 @@ function judged(bench: Workbench, { draws, rates, key }: Drawn, worked: WorkedOp
       ...(site.windows ? { startM: site.startM, endM: site.endM } : {}),
       status,
       rulings,
-      faults: faultsOf(worked.units, requestFor(worked, site), site),
+      faults: faultsOf(worked.units, requestFor(worked, site, patternOf(worked.form, worked.units)), site),
       quantities: superstructure,
       perM2: perM2(superstructure, deckAreaM2),
       supportQuantities: supports,

@@ -2,6 +2,7 @@ import { formModule } from '../forms/index.ts';
 import type { CostTable, FormId } from '../model/index.ts';
 import type { Memory, TrialRow } from './memory.ts';
 import { openSpans } from './openSpans.ts';
+import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 import { PIER_LOADS_KN, trialPiers } from './trialPiers.ts';
 import { SHARES, trialRows, type FormAndMethod, type RowMakers, type TrialRows } from './trialRows.ts';
 
@@ -102,7 +103,9 @@ export function tableShelf(makers: RowMakers, { piers }: Pick<Memory, 'piers'>):
       mean: NaN,
       onLoads: [0, 0],
     };
+    const { mainOpening } = makers.site;
     return {
+      forcedSpanM: mainOpening === null ? 0 : mainOpening.widthM + 2 * PIER_HALF_WIDTH_M,
       deckPerM(form, spanM, governingM) {
         const governing = Math.max(governingM, spanM);
         const of = governing > 0 ? spanM / governing : 1;

@@ -1,13 +1,13 @@
-import { arrange, fits, flatTable } from '../arrange/index.ts';
+import { arrange, fits, flatTable, governingSpan } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { Arrangement, FormId, MethodId, Pattern } from '../model/index.ts';
+import type { Arrangement, FormId, MethodId, Pattern, Unit } from '../model/index.ts';
 import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import { overWindows, supportsOf } from './overWindows.ts';
 import { arrangementFacts } from './facts.ts';
 import type { Proposals } from './memory.ts';
 import { relaxationWords } from './relaxationWords.ts';
-import { requestFor } from './requestFor.ts';
+import { PIER_HALF_WIDTH_M, requestFor } from './requestFor.ts';
 import { ruledOut } from './ruledOut.ts';
 import type { FormAndMethod } from './trialRows.ts';
 import type { Work } from './work.ts';
@@ -42,7 +42,7 @@ export function outBecause({ study, site }: Workbench, form: FormId): readonly s
 
 /**
  * Searches a form, unless the rules put it out, by its usual method, and by the next one where the rules warn of the
- * first. The cheapest of each method and of each set of forms is proposed first, as the table tells those apart least
+ * first. The cheapest of each method and of each kind is proposed first, as the table tells those apart least
  * surely, then the next best of all, three at most; the rest is counted by reason. Pauses while the table is laid, and
  * between the searches.
  */
@@ -68,7 +68,24 @@ function patternsFor({ site, tables }: Workbench, asked: FormAndMethod): readonl
   }
   // A deck that is launched comes from an abutment: nothing of another depth may stand in its way.
   if (site.mainOpening === null || asked.method === 'launch') return [pattern];
+  // Nor does a unit of its own lead over what far shorter spans than its shortest cross.
+  const [leastM] = spanWindow(form).possible;
+  const neededM = site.mainOpening.widthM + 2 * PIER_HALF_WIDTH_M;
+  if (neededM < OF_ITS_OWN.needed * leastM) return [pattern];
   return [pattern, ...alsoPatterns.filter(({ approach }) => openSpans(approach, site.lengthM))];
+}
+
+/**
+ * Where a unit of another form or depth is worth having over the opening: the span needed there over the shortest of its form,
+ * and its longest span over that of its approaches. Common practice, no source.
+ */
+const OF_ITS_OWN = { needed: 0.8, overApproaches: 1.25 } as const;
+
+/** Whether a unit between approaches is hardly longer than they are. */
+function isHardlyLonger({ units }: Arrangement): boolean {
+  const longest = (role: Unit['role']): number =>
+    Math.max(0, ...units.filter((unit) => unit.role === role).map(governingSpan));
+  return longest('main') < OF_ITS_OWN.overApproaches * longest('approach');
 }
 
 /**
@@ -85,15 +102,17 @@ function mayFit(bench: Workbench, asked: FormAndMethod): boolean {
 const isFirstOfItsSupports = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
   all.findIndex((other) => supportsOf(other) === supportsOf(one)) === i;
 
-/** Table cost over that of the cheapest up to which other forms for its approaches are still worth working out. */
-const OTHER_FORMS = 1.2;
+/** Table cost over that of the cheapest up to which another kind is still worth working out. */
+const OTHER_KINDS = 1.2;
 
-/** The cheapest arrangement of its set of forms in a list that rises, unless it is far dearer than the cheapest of all. */
-const isFirstOfItsForms = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
-  one.tableCost <= OTHER_FORMS * all[0]!.tableCost &&
-  all.findIndex((other) => formsIn(other) === formsIn(one)) === i;
+/** The cheapest arrangement of its kind in a list that rises, unless it is far dearer than the cheapest of all. */
+const isFirstOfItsKind = (one: Arrangement, i: number, all: readonly Arrangement[]): boolean =>
+  one.tableCost <= OTHER_KINDS * all[0]!.tableCost &&
+  all.findIndex((other) => kindOf(other) === kindOf(one)) === i;
 
-const formsIn = ({ units }: Arrangement): string => [...new Set(units.map(({ form }) => form))].sort().join();
+/** What arrangements are told apart by before their spans: the forms of their units, and one pylon or two. */
+const kindOf = ({ units }: Arrangement): string =>
+  [...new Set(units.map(({ form, pylons = [] }) => `${form} ${pylons.length}`))].sort().join();
 
 function* search(bench: Workbench, form: FormId): Work<Proposals> {
   const counts = new Map<string, number>();
@@ -115,7 +134,10 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
         const result = arrange(requestFor(asked, at.site, pattern), at.site, table);
         for (const dropped of result.dropped) count(dropped.reason, dropped.count);
         if (found.length + here.length === 0) because.push(...result.relaxations.map(relaxationWords));
-        here.push(...result.arrangements);
+        const isFlanked = pattern.kind === 'flanked';
+        const worthy = result.arrangements.filter((one) => !(isFlanked && isHardlyLonger(one)));
+        count('main span hardly longer than its approaches', result.arrangements.length - worthy.length);
+        here.push(...worthy);
         yield;
       }
       return here;
@@ -131,7 +153,7 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
     if (found[0] && !meetsTrouble(bench, found[0])) break;
   }
   const byCost = (a: Arrangement, b: Arrangement): number => a.tableCost - b.tableCost;
-  const first = byMethod.flatMap((list) => list.filter(isFirstOfItsForms));
+  const first = byMethod.flatMap((list) => list.filter(isFirstOfItsKind));
   const rest = byMethod.flat().filter((one) => !first.includes(one));
   const all = [...first.sort(byCost), ...rest.sort(byCost)];
   count('dearer than the proposals of its form', all.length - PER_FORM);

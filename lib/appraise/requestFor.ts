@@ -1,6 +1,6 @@
 import type { ArrangeRequest, Windows } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { FormId, Pattern, Site, Unit } from '../model/index.ts';
+import type { FormId, MethodId, Pattern, Site, Unit } from '../model/index.ts';
 import { endRatioWindow, leastOfTwoSpans, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import type { FormAndMethod } from './trialRows.ts';
@@ -10,12 +10,19 @@ export const PIER_HALF_WIDTH_M = 1.5;
 /** Least distance between two supports of a hung unit over its shortest main span. Common practice, no source. */
 const HUNG_SPACING = 0.5;
 
+/** That of a pattern: no more than the shortest side span it is laid out with. */
+const hungSpacing = ({ twoPylonSide }: Extract<Pattern, { kind: 'pylon' }>): number =>
+  Math.min(HUNG_SPACING, twoPylonSide[0]);
+
 /** Band of the longest span of a unit on a crossing. */
 function spanBand(form: FormId, site: Site): Pick<Windows, 'minSpanM' | 'maxSpanM'> {
   // Where the shortest is longer than the crossing nothing is found, and what stands there is told so.
   const [least, most] = openSpans(form, site.lengthM) ?? spanWindow(form).possible;
   return { minSpanM: least, maxSpanM: most };
 }
+
+/** Arms are built out from a pier: a deck made so has two spans at least. By definition of the method. */
+const LEAST_SPANS: Partial<Record<MethodId, number>> = { 'balanced-cantilever': 2 };
 
 function continuousWindows(form: FormId, site: Site): Windows {
   const { pattern } = formModule(form);
@@ -36,7 +43,13 @@ export function requestFor(
   pattern: Pattern = formModule(form).pattern,
 ): ArrangeRequest {
   const base = { form, method, pattern, pierHalfWidthM: PIER_HALF_WIDTH_M };
-  if (pattern.kind === 'continuous') return { ...base, windows: continuousWindows(form, site) };
+  if (pattern.kind === 'continuous') {
+    const leastSpans = LEAST_SPANS[method];
+    return {
+      ...base,
+      windows: { ...continuousWindows(form, site), ...(leastSpans === undefined ? {} : { leastSpans }) },
+    };
+  }
   if (pattern.kind === 'flanked') {
     return {
       ...base,
@@ -48,7 +61,7 @@ export function requestFor(
   return {
     ...base,
     // The main unit has no end spans; pylons have ratios of their own in the pattern.
-    windows: pattern.kind === 'pylon' ? { ...band, minSpacingM: HUNG_SPACING * band.minSpanM } : band,
+    windows: pattern.kind === 'pylon' ? { ...band, minSpacingM: hungSpacing(pattern) * band.minSpanM } : band,
     approach: continuousWindows(pattern.approach, site),
   };
 }

@@ -1,5 +1,6 @@
 import { remembered } from '../kept.ts';
-import type { MeasuredLine, RoadProfile, Site } from '../model/index.ts';
+import type { MeasuredLine, RoadProfile, Site, Support } from '../model/index.ts';
+import { programmeData, supportWeeks } from '../programme/index.ts';
 import { constructionDepth, groundAt, roadLevelAt, stretchAt } from '../site/index.ts';
 import { expectedLines, placeText, settingAt, standPierBetween } from '../substructure/index.ts';
 import type { Memory } from './memory.ts';
@@ -37,6 +38,17 @@ function likeness(site: Site, chainageM: number): string {
   ].join();
 }
 
+/**
+ * What a pier adds to the time on site: the deck begins when so much of the supports stands. Of the methods that wait for the
+ * least of them, as steel in the shop may take as long.
+ */
+function monthsOf(pier: Support): MeasuredLine {
+  const { crews, methods, weeksPerMonth } = programmeData;
+  const share = Math.min(...Object.values(methods).map(({ startsAfter }) => startsAfter));
+  const quantity = (share * supportWeeks(pier, [], 'likely')) / crews / weeksPerMonth;
+  return { part: 'preliminaries', item: 'site-month', quantity, what: 'months on site', how: 'trial pier' };
+}
+
 /** Cost of a pier, money, at a chainage, m, under one of `PIER_LOADS_KN` by its index. */
 export type PierCost = (chainageM: number, load: number) => number;
 
@@ -60,9 +72,8 @@ export function trialPiers(
       trafficKNm: (1 - PIER_PERMANENT) * perM,
       depthM: ORDINARY_DEPTH_M,
     };
-    return expectedLines(
-      standPierBetween(site, deck, chainageM, PIER_SPAN_M, PIER_SPAN_M, roadLevel(chainageM)),
-    );
+    const pier = standPierBetween(site, deck, chainageM, PIER_SPAN_M, PIER_SPAN_M, roadLevel(chainageM));
+    return [...expectedLines(pier), monthsOf(pier)];
   };
   const exact = (chainageM: number, load: number): number => {
     const place = `${placeText(site, chainageM)} ${roadLevel(chainageM)}`;

@@ -31,6 +31,10 @@ export interface Worked {
 /** Arrangements are different when they differ in this: number of supports, abutments included, and of pylons. */
 export const kindFor = (supports: number, pylons: number): number => supports * 4 + pylons;
 
+/** Number of pylons, and of supports, of a kind. */
+export const pylonsOf = (kind: number): number => kind % 4;
+export const supportsOf = (kind: number): number => Math.floor(kind / 4);
+
 /** The kind of a row of placed units. */
 export function kindOf(placed: readonly PlacedUnit[]): number {
   let supports = 1;

@@ -5,21 +5,39 @@ import type { Frame } from './frame.ts';
 const EVEN = 1e-7;
 
 /**
- * Equal approach spans are preferred: what a span of an approach costs more in the search when it is shorter than the
+ * Equal spans are preferred: what a span of an approach costs more in the search when it is shorter than the
  * longest of its unit, per square metre of that difference, as a share of a metre of deck. A quarter of a 36 m span is
  * then worth 8 % of itself. Common practice, no source: one girder, one falsework, one look.
  */
 const UNEVEN = 0.01;
 
-/** That preference for one span, money; none in a main unit, whose end spans are shorter by right. */
+/**
+ * The same of an inner span of a main unit against a longest span that an obstacle forces: that is longer by right, and the
+ * preference decides only between what costs about as much. Common practice, no source.
+ */
+const UNEVEN_BY_RIGHT = 0.001;
+
+/**
+ * That preference for one span, money. In a main unit the longest span is held against the others only by what it is
+ * longer than the site forces; its end spans are shorter by right, and so are those beside pylons.
+ * @param worksAs inner span, as a multiple of this one, that it works like
+ */
 export function unevenCost(
   table: CostTable,
-  unit: Pick<Unit, 'form' | 'role'>,
+  { form, role, pylons }: Pick<Unit, 'form' | 'role' | 'pylons'>,
   spanM: number,
   governingM: number,
+  worksAs: number,
 ): number {
-  if (unit.role !== 'approach') return 0;
-  return UNEVEN * table.deckPerM(unit.form, governingM, governingM) * (governingM - spanM) ** 2;
+  const shorter = governingM - spanM;
+  let square = UNEVEN * shorter ** 2;
+  if (role === 'main') {
+    const { forcedSpanM } = table;
+    if (forcedSpanM === undefined || worksAs !== 1 || pylons !== undefined) return 0;
+    const unforced = Math.max(0, governingM - Math.max(spanM, forcedSpanM));
+    square = UNEVEN * unforced ** 2 + UNEVEN_BY_RIGHT * shorter ** 2;
+  }
+  return square * table.deckPerM(form, governingM, governingM);
 }
 
 /** Cost of one span by its length, money, at each whole metre, for one governing span. */
@@ -39,7 +57,7 @@ export const aloneWorksAs = (table: CostTable, form: FormId, governingM: number)
  */
 export function spanCosts(
   table: CostTable,
-  unit: Pick<Unit, 'form' | 'role'>,
+  unit: Pick<Unit, 'form' | 'role' | 'pylons'>,
   governingM: number,
   worksAs = 1,
 ): SpanCosts {
@@ -57,7 +75,7 @@ export function spanCosts(
       costs[t] =
         t * (rateBefore + share * (rate - rateBefore)) +
         even * t * t +
-        (t < governingM ? unevenCost(table, unit, t, governingM) : 0);
+        (t < governingM ? unevenCost(table, unit, t, governingM, worksAs) : 0);
     }
     before = s;
     rateBefore = rate;

@@ -8,6 +8,7 @@ export interface Limits {
   readonly endMost: number;
   readonly interiorLeast: number;
   readonly minSpacingM: number;
+  readonly leastSpans: number;
   readonly mostSpans: number;
 }
 
@@ -32,6 +33,7 @@ export function limitsOf(windows: Windows): Limits {
     endMost,
     interiorLeast: windows.interiorLeast ?? Math.min(endLeast, 1),
     minSpacingM: windows.minSpacingM ?? Math.min(endLeast, 1) * minSpanM,
+    leastSpans: windows.leastSpans ?? 1,
     mostSpans: windows.mostSpans ?? Infinity,
   };
 }
@@ -39,6 +41,7 @@ export function limitsOf(windows: Windows): Limits {
 export type Fault =
   | 'span outside the band of the form'
   | 'more spans than the form has'
+  | 'no pier to build it from'
   | 'end span outside its window'
   | 'interior span too short for its neighbours';
 
@@ -56,6 +59,7 @@ export function spanFault(spans: readonly number[], limits: Limits): Fault | nul
   }
   const slack = SLACK * longest + 1e-6;
   if (spans.length > limits.mostSpans) return 'more spans than the form has';
+  if (spans.length < limits.leastSpans) return 'no pier to build it from';
   if (!(longest >= limits.minSpanM - slack && longest <= limits.maxSpanM + slack))
     return 'span outside the band of the form';
   if (spans.length === 1) return null;

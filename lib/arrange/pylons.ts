@@ -156,9 +156,10 @@ export function spanRows({ table, request }: Pick<MainSearch, 'table' | 'request
     const whole = Math.ceil(mainM - SLACK);
     let row = rows.get(whole);
     if (row === undefined) {
-      const unit = { form: request.form, role: 'main' } as const;
+      const isHung = sidesOf(request.pattern)?.hung === true;
+      const unit = { form: request.form, role: 'main', ...(isHung ? { pylons: [] } : {}) } as const;
       const inner = spanCosts(table, unit, whole);
-      const worksAs = sidesOf(request.pattern)?.hung === true ? 1 : endWorksAs(table, request.form, whole);
+      const worksAs = isHung ? 1 : endWorksAs(table, request.form, whole);
       row = { inner, side: worksAs === 1 ? inner : spanCosts(table, unit, whole, worksAs) };
       rows.set(whole, row);
     }

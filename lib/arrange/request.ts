@@ -12,7 +12,8 @@ export interface Windows {
   readonly endRatio?: readonly [least: number, most: number];
   /** Interior span over the longest span of the unit; the first figure of `endRatio` unless given. */
   readonly interiorLeast?: number;
-  /** Most spans of a unit; any number unless given. */
+  /** Fewest and most spans of a unit; any number unless given. */
+  readonly leastSpans?: number;
   readonly mostSpans?: number;
   /** Least distance between two supports, m; first figure of `endRatio` x `minSpanM`, or without one `minSpanM`, unless given. */
   readonly minSpacingM?: number;

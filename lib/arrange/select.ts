@@ -1,5 +1,5 @@
 import type { CostTable } from '../model/index.ts';
-import { workOut, type Candidate, type Worked } from './candidate.ts';
+import { pylonsOf, supportsOf, workOut, type Candidate, type Worked } from './candidate.ts';
 import type { Counter } from './counter.ts';
 import type { Frame } from './frame.ts';
 
@@ -37,9 +37,35 @@ function bestOf(candidates: readonly Candidate[], frame: Frame, table: CostTable
   return tried.reduce((a, b) => (b.worked.cost < a.worked.cost * (1 - 1e-9) ? b : a));
 }
 
+/** Of kinds with rising costs, the first few, and the first two of every number of pylons. */
+const worthLooking = (rising: readonly (readonly Candidate[])[], few: number): (readonly Candidate[])[] => {
+  const seen = new Map<number, number>();
+  return rising.filter(([first], i) => {
+    const pylons = pylonsOf(first!.kind);
+    const before = seen.get(pylons) ?? 0;
+    seen.set(pylons, before + 1);
+    return i < few || before < 2;
+  });
+};
+
 /**
- * The cheapest arrangement of each kind (number of supports and of pylons), the `keep` cheapest of those, cheapest
- * first. The rest is counted by reason.
+ * Of kinds with rising costs as many as are kept: the cheapest with each number of pylons, for what carries is seen only when
+ * they are worked out, then the cheapest of all. No two have as many supports, by which options are known.
+ */
+function keptOf(rising: readonly Kind[], keep: number): Kind[] {
+  const kept: Kind[] = [];
+  const isFree = ({ kind }: Kind): boolean =>
+    kept.every((other) => supportsOf(other.kind) !== supportsOf(kind));
+  const pylons = new Set(rising.map(({ kind }) => pylonsOf(kind)));
+  for (const count of pylons)
+    kept.push(...rising.filter((one) => pylonsOf(one.kind) === count && isFree(one)).slice(0, 1));
+  for (const one of rising) if (isFree(one)) kept.push(one);
+  return kept.slice(0, keep);
+}
+
+/**
+ * The cheapest arrangement of each kind (number of supports and of pylons), the `keep` of those that `keptOf`
+ * chooses, cheapest first. The rest is counted by reason.
  */
 export function select(
   candidates: readonly Candidate[],
@@ -55,8 +81,9 @@ export function select(
     else same.push(candidate);
   }
   // Kinds come with rising estimates, so the cheapest few by true cost are among the first twice as many.
-  const best = [...kinds.values()].slice(0, 2 * keep).map((same) => bestOf(same, frame, table));
-  const kept = best.sort((a, b) => a.worked.cost - b.worked.cost).slice(0, keep);
+  const byCost = (one: Kind, other: Kind): number => one.worked.cost - other.worked.cost;
+  const best = worthLooking([...kinds.values()], 2 * keep).map((same) => bestOf(same, frame, table));
+  const kept = keptOf(best.sort(byCost), keep).sort(byCost);
   const keptKinds = new Set(kept.map(({ kind }) => kind));
   for (const [kind, same] of kinds) {
     for (const candidate of same) {

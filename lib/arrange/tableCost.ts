@@ -39,7 +39,7 @@ export function governingSpan(unit: Unit): number {
  * Cost of a row of units on the cost table, money: decks at the governing span of each unit, end spans of continuous
  * ones and spans alone as the longer inner spans that they work like, fixed costs, and every
  * intermediate support, dearer in a soft zone where the table says so. Abutments are the same for every arrangement and
- * are left out. Uneven approach spans carry the preference of `unevenCost`. For ordering only.
+ * are left out. Uneven spans carry the preference of `unevenCost`. For ordering only.
  */
 export function tableCost(units: readonly Unit[], table: CostTable): number {
   let cost = 0;
@@ -55,7 +55,7 @@ export function tableCost(units: readonly Unit[], table: CostTable): number {
       const works = hasEnds && (i === 1 || i === unit.supportsM.length - 1) ? atEnd : 1;
       cost +=
         span * table.deckPerM(unit.form, works * span, governingM) +
-        unevenCost(table, unit, span, governingM);
+        unevenCost(table, unit, span, governingM, works);
     }
   }
   for (const { chainageM, form, leftM, rightM } of standings(units)) {

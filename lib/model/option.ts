@@ -47,6 +47,8 @@ export interface CostTable {
   endWorksAs?(form: FormId, governingM: number): number;
   /** The same of the one span of a unit that has no other. 1 where absent. */
   aloneWorksAs?(form: FormId, governingM: number): number;
+  /** Span over the widest barred stretch, m; 0 where nothing is barred. Even inner spans are not preferred where absent. */
+  readonly forcedSpanM?: number;
   /** Structural depth at midspan, m, for a governing span. */
   depthM(form: FormId, governingM: number): number;
   /** Fixed cost of a unit of this form (pylons, set-up of its method), money; `pylons` is 0 unless given. */

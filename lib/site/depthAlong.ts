@@ -15,5 +15,8 @@ export function depthAt(depth: number | DepthAlong, chainageM: number): number {
   const d0 = depthM[i - 1]!;
   const d1 = depthM[i] ?? d0;
   const share = x1 > x0 ? Math.min(Math.max((chainageM - x0) / (x1 - x0), 0), 1) : 0;
-  return d0 + share * (d1 - d0);
+  let deepest = d0 + share * (d1 - d0);
+  // Where two units meet the deeper one counts, whichever side it lies on.
+  for (let next = i + 1; xM[next] === chainageM; next += 1) deepest = Math.max(deepest, depthM[next]!);
+  return deepest;
 }

@@ -85,7 +85,9 @@ describe('appraise with windows for the abutments', () => {
   });
 
   it('appraise(mirrored windows) mirrors every arrangement, and its cost as far as depths are chosen', () => {
-    const there = windowed(both);
+    // Ground is drawn place by place: with 300 draws two of a pair differ by more than 1 % by chance.
+    const few = windowed(both);
+    const there = { ...few, books: { ...few.books, draws: 4000 } };
     const turned = mirrored(there);
     const { startM, endM } = there.brief.crossing;
     const study = {

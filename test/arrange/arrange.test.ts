@@ -33,16 +33,13 @@ describe('arrange where nothing is barred', () => {
     const { arrangements } = arrange(request, site, demoTable());
     expect(arrangements.length).toBeGreaterThan(0);
     for (const arrangement of arrangements) {
-      const { supportsM, pylons } = main(arrangement);
-      // Of one pylon the main span is the longer of the two beside it, of two that between them.
-      const [from, to] =
-        pylons === undefined
-          ? [supportsM[0]!, supportsM.at(-1)!]
-          : pylons.length === 2
-            ? pylons
-            : [supportsM[0]!, supportsM.at(-1)!];
-      expect(from!).toBeLessThanOrEqual(200);
-      expect(to!).toBeGreaterThanOrEqual(200);
+      const { supportsM, pylons = [] } = main(arrangement);
+      const [first, last] = [supportsM[0]!, supportsM.at(-1)!];
+      // Beside one pylon both spans are about as long; of two the main span is that between them.
+      const [from, to] = pylons.length === 2 ? pylons.map((i) => supportsM[i]!) : [first, last];
+      // The floor of the valley reaches from 180 to 220 m: supports may be moved along it where that is cheaper.
+      expect(from!).toBeLessThan(220);
+      expect(to!).toBeGreaterThan(180);
     }
   });
 });

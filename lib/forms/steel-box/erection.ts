@@ -46,7 +46,9 @@ export function erection(
     stageHogKNm.fill(shares.hog * weight * longest ** 2);
     return { stageSagKNm, stageHogKNm, launchKN: shares.reaction * weight * longest };
   }
-  const { craneKN, imbalance } = steelBoxData.cantilever;
+  const { craneKN } = steelBoxData.cantilever;
+  // What is put together on towers hangs out over nothing.
+  const imbalance = hingesM.length > 0 ? steelBoxData.cantilever.imbalance : 0;
   // A derrick on the tip of each of the two arms that meet.
   const cranes =
     hingesM.length > 0

@@ -18,7 +18,7 @@ import {
 /**
  * Steel box girders with an orthotropic deck: one cell, or more on wide decks, of constant depth or haunched. `depthM` of
  * the task is the depth at midspan, deck plate to soffit; that over the piers is found inside its published band, and is
- * the same where the box is launched. Simple or continuous spans of about 60 to 300 m.
+ * the same where the box is launched. Set by crane it is put together on towers. Simple or continuous spans of about 60 to 300 m.
  */
 export const steelBox: FormModule = {
   id: 'steel-box',
@@ -26,7 +26,7 @@ export const steelBox: FormModule = {
   name: 'Steel box girder',
   pattern: { kind: 'continuous' },
   alsoPatterns: [{ kind: 'flanked', approach: 'composite-i', side: [0.6, 0.8] }],
-  methods: ['balanced-cantilever', 'launch'],
+  methods: ['balanced-cantilever', 'launch', 'crane'],
   reads: ['haunch'],
   choices: ['squareEnds'],
   size: (task) => withSkewEnds(task, size),
