@@ -148,14 +148,20 @@ export const factFigures: readonly Descriptor[] = [
             ),
     })),
   ),
-  fact(
-    'falseworkHeightM',
-    'greatest height from ground to soffit under the main unit; 0 without falsework',
-    (at) => ({
+  ...(
+    [
+      ['falseworkHeightM', 'greatest height from ground to soffit under the main unit; 0 without falsework'],
+      [
+        'liftHeightM',
+        'greatest height from ground or water to soffit under the main unit; 0 without a crane',
+      ],
+    ] as const
+  ).map(([id, formula]) =>
+    fact(id, formula, (at) => ({
       road: at.option.profile.pieces.map((_, i) => `${at.root}/profile/pieces/${i}/levelM`),
       depth: `${at.root}/depthM/midspan`,
       ground: at.option.supports.map((_, s) => `${at.root}/supports/${s}/groundLevelM`),
-    }),
+    })),
   ),
   fact('prestressed', 'strand is measured in the main unit', (at) => ({
     lines: at.option.designs[main(at)]!.lines.map((_, i) => `${design(at)}/lines/${i}/quantity`),

@@ -1,4 +1,14 @@
-import type { AppraisedOption, Facts, Option, Site, Study, Unit, WorkedOption } from '../model/index.ts';
+import type {
+  AppraisedOption,
+  Facts,
+  MethodId,
+  Option,
+  RoadProfile,
+  Site,
+  Study,
+  Unit,
+  WorkedOption,
+} from '../model/index.ts';
 import { cannotCarry } from '../forms/index.ts';
 import {
   cosineOfSkew,
@@ -11,7 +21,9 @@ import {
 import { quantitiesOf } from '../takeoff/index.ts';
 import { PIER_HALF_WIDTH_M } from './requestFor.ts';
 import { curveFacts } from './curveFacts.ts';
+import { ORDINARY_DEPTH_M } from './meanClearance.ts';
 import { crossedFacts, methodFacts } from './methodFacts.ts';
+import { profileOrNearest } from './profileOrNearest.ts';
 import { regradingFacts } from './regradingFacts.ts';
 import { riverFacts } from './riverFacts.ts';
 import { supportFacts } from './supportFacts.ts';
@@ -66,18 +78,36 @@ function falseworkOver(site: Site, main: Unit): Known {
   };
 }
 
-/** Greatest height from ground to soffit under the main unit, m. */
-function falseworkHeightM(site: Site, option: WorkedOption, main: Unit): number {
-  const from = main.supportsM[0]!;
-  const to = main.supportsM.at(-1)!;
-  const soffit = (x: number): number =>
-    roadLevelAt(option.profile, x) - constructionDepth(site.deck, option.depthM.midspan);
-  const points = [...site.groundX.filter((x) => x > from && x < to), from, to];
-  return Math.max(...points.map((x) => soffit(x) - groundAt(site, x)));
+/** The road over an arrangement and how deep its deck is at midspan, m. */
+interface Over {
+  readonly profile: RoadProfile;
+  readonly depthM: number;
 }
 
-/** What is known of where the supports stand. */
-export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'method'>): Facts {
+/** Before anything is sized: the road that clears what is crossed with an ordinary deck. */
+const ordinaryOver = (site: Site): Over => ({
+  profile: profileOrNearest(site, constructionDepth(site.deck, ORDINARY_DEPTH_M)),
+  depthM: ORDINARY_DEPTH_M,
+});
+
+/** How high the main unit is put together: greatest height to its soffit from the ground, or from what a crane stands on. */
+function buildingHeights(site: Site, method: MethodId, main: Unit, { profile, depthM }: Over): Known {
+  const [from, to] = [main.supportsM[0]!, main.supportsM.at(-1)!];
+  const points = [...site.groundX.filter((x) => x > from && x < to), from, to];
+  const above = (floor: (x: number) => number): number =>
+    Math.max(...points.map((x) => roadLevelAt(profile, x) - constructionDepth(site.deck, depthM) - floor(x)));
+  return {
+    falseworkHeightM: method === 'falsework' ? above((x) => groundAt(site, x)) : 0,
+    liftHeightM: method === 'crane' ? above((x) => groundAt(site, x) + waterDepthAt(site, x)) : 0,
+  };
+}
+
+/** What is known of where the supports stand, and of the heights over them: under an ordinary deck unless it is given. */
+export function arrangementFacts(
+  site: Site,
+  option: Pick<Option, 'units' | 'method'>,
+  over: Over = ordinaryOver(site),
+): Facts {
   const main = mainUnit(option.units);
   const spans = spansOf(main);
   const all = [...new Set(option.units.flatMap((unit) => unit.supportsM))];
@@ -103,6 +133,7 @@ export function arrangementFacts(site: Site, option: Pick<Option, 'units' | 'met
     radiusConstant: site.planRadiusM === null ? 'unknown' : true,
     ...crossedFacts(site, option.units, option.method),
     openSkewM: openSkewM(site),
+    ...buildingHeights(site, option.method, main, over),
     ...(option.method === 'falsework' ? falseworkOver(site, main) : {}),
     ...(main.pylons ? { pylons: main.pylons.length, sideSpanRatio: sideSpanRatio(main, main.pylons) } : {}),
     ...(spans.length > 1 && !main.pylons ? { endSpanRatio: endSpanRatio(spans) } : {}),
@@ -136,12 +167,11 @@ export function optionFacts(
   const pieces = option.designs.flatMap(({ heaviestPiece }) => (heaviestPiece ? [heaviestPiece] : []));
   const clearances = obstacles.flatMap(({ clearance }) => (clearance ? [clearance] : []));
   const known: Known = {
-    ...arrangementFacts(site, option),
+    ...arrangementFacts(site, option, { profile: option.profile, depthM: option.depthM.midspan }),
     ...supportFacts(site, option),
     ...riverFacts(site, option),
     ...methodFacts(site, option, study.brief),
     ...regradingFacts(site, option),
-    falseworkHeightM: option.method === 'falsework' ? falseworkHeightM(site, option, main) : 0,
     haunched: design.depthM.support !== design.depthM.midspan,
     prestressed: quantitiesOf(design.lines).prestressKg > 0,
     supportDepthM: design.depthM.support,

@@ -146,3 +146,44 @@ describe('appraise(cable-stayed)', { timeout: 60_000 }, () => {
     expect(new Set(options.map(({ supports }) => supports.length)).size).toBe(options.length);
   });
 });
+
+describe('appraise(gorge)', () => {
+  it('launches girders that no crane sets from so far below, and says of those set by crane why not', () => {
+    const study = flat(150, [0, 0.1], 'composite-i');
+    const { brief } = study;
+    const levels = [
+      [-60, 200],
+      [0, 200],
+      [20, 185],
+      [45, 150],
+      [75, 132],
+      [105, 150],
+      [130, 185],
+      [150, 200],
+      [210, 200],
+    ] as const;
+    const gorge: Study = {
+      ...study,
+      brief: {
+        ...brief,
+        crossing: { ...brief.crossing, ground: levels.map(([chainageM, levelM]) => ({ chainageM, levelM })) },
+        road: { ...brief.road, startLevelM: 203, endLevelM: 203 },
+        obstacles: [],
+        groundStretches: [
+          { fromM: 0, toM: 150, known: true, classes: [{ ground: 'rock', bearingDepthM: 2, odds: 1 }] },
+        ],
+      },
+    };
+    const { options } = answerTo(gorge);
+    const warned = (method: string): Set<boolean> =>
+      new Set(
+        options
+          .filter((one) => one.method === method)
+          .map(({ rulings }) =>
+            rulings.some(({ rule, effect }) => rule === 'crane-height' && effect === 'caution'),
+          ),
+      );
+    expect(warned('crane')).toEqual(new Set([true]));
+    expect(warned('launch')).toEqual(new Set([false]));
+  });
+});
