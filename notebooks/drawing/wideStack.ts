@@ -171,7 +171,7 @@ function arrange(
     levelM: topM,
     y: titleY + (isTall ? COST_PX : 12),
   });
-  const dimensionY = Math.max(frame.y(bottomM) + (isTall ? 14 : 6), titleY + 70);
+  const dimensionY = Math.max(frame.y(bottomM) + DIMENSION_PX, titleY + 70);
   // On the half lines of the page: a pile that grows by little does not move all that stands below.
   const height = Math.ceil((dimensionY + 12) / HALF_LINE_PX) * HALF_LINE_PX;
   const chainages = supportChainages(option);
@@ -286,6 +286,9 @@ const HALF_LINE_PX = 12;
 
 /** From the top of a row down to the foot of its name, px. */
 const TITLE_PX = 23;
+
+/** From the foot of an elevation down to its dimension line: the figures over that stand clear of the ground, px. */
+const DIMENSION_PX = 14;
 
 /** From the name of an option down to its elevation where its costs stand over that, px. */
 const COST_PX = 46;
