@@ -1,11 +1,12 @@
-import { formIds } from '../../lib/index.ts';
-import type { Guide } from '../../lib/index.ts';
+import { formIds, PIER_HALF_WIDTH_M } from '../../lib/index.ts';
+import type { Guide, Site } from '../../lib/index.ts';
 import { spanChart, spanTable, type SpanChartInput } from '../charts/spanChart.ts';
 import { spanRows } from '../charts/spanRows.ts';
 import { tableBehind } from '../charts/table.ts';
 import { fixed } from '../format.ts';
 import { h } from '../html.ts';
 import type { LineSection, Sheet, StudyStore } from '../page/index.ts';
+import { presetQuestion, writeQuestion, type Question } from '../span-chart/question.ts';
 import { askedWords, formsNotAsked, formsTable, listWords, unsizedWords } from './formsTable.ts';
 import type { StudyCells } from './studyCells.ts';
 
@@ -17,6 +18,17 @@ const chartInput = (guide: Guide, openingM: number, widthPx: number): SpanChartI
   widthPx,
   prefix: 'spans',
 });
+
+/** What the span chart is asked for the widest opening and the deck of a site; figures it cannot take are left to it. */
+function questionOf({ mainOpening, deck, lengthM, planRadiusM }: Site): Question {
+  return {
+    openingM: mainOpening?.widthM ?? presetQuestion.openingM,
+    pierM: 2 * PIER_HALF_WIDTH_M,
+    widthM: deck.widthM,
+    lengthM,
+    radiusM: planRadiusM === null || planRadiusM === Infinity ? 'straight' : planRadiusM,
+  };
+}
 
 /** The heading over the chart on its printed sheet, the notes under it, and the forms asked for, which stand there too, px. */
 const ROUND_CHART_PX = 275;
@@ -50,7 +62,7 @@ export function spanSection(page: Sheet, store: StudyStore, cells: StudyCells): 
         };
         return [spanChart(input), tableBehind(spanTable(input))];
       },
-      notes: [
+      notes: ({ site: of }) => [
         h(
           'p',
           {},
@@ -60,8 +72,8 @@ export function spanSection(page: Sheet, store: StudyStore, cells: StudyCells): 
           'p',
           {},
           'Ranges come from rules; where sources disagree the wider range is thin and the range they agree on is thick. Where they disagree, and by how much, is shown on the page ',
-          h('a', { href: './span-chart.html' }, 'Span chart'),
-          '.',
+          h('a', { href: `./span-chart.html${writeQuestion(questionOf(of))}` }, 'Span chart'),
+          ', which is asked for this opening and this deck, and there works out how far each form carries it.',
         ),
         h(
           'p',

@@ -108,6 +108,14 @@ describe('option study', () => {
     expect(await page.locator('h1').textContent()).toBe('Wend bridge, option B');
   });
 
+  it('asks the span chart for the opening and the deck of the study', async () => {
+    const { page } = study;
+    const width = page.locator('[role=spinbutton][aria-label^="no-pier width,"]').first();
+    const asked = `./span-chart.html?opening=${(await width.getAttribute('aria-valuenow')) ?? ''}&pier=3&width=12.5&length=230`;
+    const link = page.locator('[id="2+010"] a[href^="./span-chart.html"]');
+    await expect.poll(() => link.getAttribute('href')).toBe(asked);
+  });
+
   it('a form is asked for and left out again; what is not asked for is listed as dropped', async () => {
     const { page } = study;
     const cell = page.locator('[id="2+020"]');
