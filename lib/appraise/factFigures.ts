@@ -163,6 +163,12 @@ export const factFigures: readonly Descriptor[] = [
       ground: at.option.supports.map((_, s) => `${at.root}/supports/${s}/groundLevelM`),
     })),
   ),
+  fact('towersBarred', 'temporary towers of the main unit inside a barred stretch', (at) => ({
+    ...mainEnds(at),
+    stretches: at.site.zones.flatMap(({ hard }, i) =>
+      hard ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
+    ),
+  })),
   fact('prestressed', 'strand is measured in the main unit', (at) => ({
     lines: at.option.designs[main(at)]!.lines.map((_, i) => `${design(at)}/lines/${i}/quantity`),
   })),

@@ -9,7 +9,7 @@ import type {
   Unit,
   WorkedOption,
 } from '../model/index.ts';
-import { cannotCarry } from '../forms/index.ts';
+import { cannotCarry, formModule } from '../forms/index.ts';
 import {
   cosineOfSkew,
   TRIAL_SKEW_DEG,
@@ -102,6 +102,17 @@ function buildingHeights(site: Site, method: MethodId, main: Unit, { profile, de
   };
 }
 
+/** Temporary towers may be moved along by so much, m. Common practice, no source. */
+const TOWER_MOVES_M = 2;
+
+/** Temporary towers of the main unit that would stand where no support may. */
+function towersBarred(site: Site, method: MethodId, main: Unit): number {
+  const towers = formModule(main.form).temporaryTowersM?.({ method, spansM: spansOf(main) }) ?? [];
+  const isBarred = (x: number): boolean =>
+    site.zones.some(({ hard, fromM, toM }) => hard && x > fromM + TOWER_MOVES_M && x < toM - TOWER_MOVES_M);
+  return towers.filter((x) => isBarred(main.supportsM[0]! + x)).length;
+}
+
 /** What is known of where the supports stand, and of the heights over them: under an ordinary deck unless it is given. */
 export function arrangementFacts(
   site: Site,
@@ -134,6 +145,7 @@ export function arrangementFacts(
     ...crossedFacts(site, option.units, option.method),
     openSkewM: openSkewM(site),
     ...buildingHeights(site, option.method, main, over),
+    towersBarred: towersBarred(site, option.method, main),
     ...(option.method === 'falsework' ? falseworkOver(site, main) : {}),
     ...(main.pylons ? { pylons: main.pylons.length, sideSpanRatio: sideSpanRatio(main, main.pylons) } : {}),
     ...(spans.length > 1 && !main.pylons ? { endSpanRatio: endSpanRatio(spans) } : {}),

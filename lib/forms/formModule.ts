@@ -49,6 +49,8 @@ export interface FormModule {
    * published ratio; absent where the published bands hold down to the shortest span.
    */
   leastDepthM?(task: Pick<UnitTask, 'standard' | 'deck' | 'spansM'>): number;
+  /** Where temporary towers stand while a unit is built, m from its first support; absent where it needs none. */
+  temporaryTowersM?(task: Pick<UnitTask, 'spansM' | 'method'>): readonly number[];
   /**
    * Sizes one unit. Always returns a design; where a limit cannot be met within practical plates, strands or bars the
    * offending check has a utilisation above 1 and a warning says so (the option-stage rule then puts the option out).

@@ -1,7 +1,9 @@
+import { pretensioned } from '../common/precast/pretensioned.ts';
 import { sizePrecast } from '../common/precast/sizePrecast.ts';
 import type { FormModule } from '../formModule.ts';
 import { iBeams } from './iBeams.ts';
 import { mustBeSpliced, sizeSpliced } from './spliced/sizeSpliced.ts';
+import { splicePlan } from './spliced/splicePlan.ts';
 
 /**
  * Precast pretensioned I and bulb-tee beams in one piece under a slab cast in place: each span carries its own weight and
@@ -17,5 +19,7 @@ export const precastI: FormModule = {
   methods: ['crane'],
   joined: 'after-placing',
   reads: ['girders'],
+  temporaryTowersM: (task) =>
+    mustBeSpliced(task) ? splicePlan(task.spansM, pretensioned.haul.lengthM).atM : [],
   size: (task) => (mustBeSpliced(task) ? sizeSpliced(task) : sizePrecast(iBeams, task)),
 };

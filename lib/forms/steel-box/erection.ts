@@ -1,3 +1,4 @@
+import type { UnitTask } from '../../model/index.ts';
 import { launchStages, pointLoads, type Effects, type LineBeam } from '../../mechanics/index.ts';
 import { steelBoxData } from './steelBoxData.ts';
 import type { SteelBoxModel } from './steelBoxModel.ts';
@@ -16,7 +17,11 @@ export interface ErectionMoments {
  * Spans whose middle is closed by cantilevers from both sides: the longest inner ones where the box is built that way.
  * Shorter ones are put together on towers before and hold the arms down.
  */
-export function cantileveredSpans({ task }: Pick<SteelBoxModel, 'task'>): number[] {
+export function cantileveredSpans({
+  task,
+}: {
+  readonly task: Pick<UnitTask, 'method' | 'spansM'>;
+}): number[] {
   const { method, spansM } = task;
   if (method !== 'balanced-cantilever') return [];
   const least = steelBoxData.cantilever.leastOverLongest * Math.max(...spansM);

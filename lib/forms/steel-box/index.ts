@@ -1,12 +1,13 @@
 import type { Design, UnitTask } from '../../model/index.ts';
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { limiting } from '../common/checks.ts';
+import { evenTowers } from '../common/evenTowers.ts';
 import { withSkewEnds } from '../common/skewEnds.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { choosePierDepth } from './choosePierDepth.ts';
 import { steelBoxDepth, steelBoxElevation, steelBoxSections } from './steelBoxDrawing.ts';
-import { steelBoxLines } from './steelBoxLines.ts';
+import { steelBoxLines, towersInSpans } from './steelBoxLines.ts';
 import {
   steelBoxFigures,
   steelBoxOwnShare,
@@ -29,6 +30,10 @@ export const steelBox: FormModule = {
   methods: ['balanced-cantilever', 'launch', 'crane'],
   reads: ['haunch'],
   choices: ['squareEnds'],
+  temporaryTowersM(task) {
+    const towers = towersInSpans(task);
+    return evenTowers(task.spansM, (_, span) => towers[span]!);
+  },
   size: (task) => withSkewEnds(task, size),
 };
 

@@ -1,5 +1,5 @@
 import { materials } from '../../actions/index.ts';
-import type { MeasuredLine } from '../../model/index.ts';
+import type { MeasuredLine, UnitTask } from '../../model/index.ts';
 import { measured } from '../common/measured.ts';
 import { cantileveredSpans } from './erection.ts';
 import { bottomWidth } from './boxLayout.ts';
@@ -124,19 +124,25 @@ export function painted({ model, steel }: SizedSteelBox): { outsideM2: number; i
   return { outsideM2, insideM2: insideM2 + steelBoxData.insidePaintM2PerT.value * massT };
 }
 
+/** Towers under each span of a box: under those that are put together on them. */
+export function towersInSpans(task: Pick<UnitTask, 'spansM' | 'method'>): number[] {
+  if (task.method === 'launch') return task.spansM.map(() => 0);
+  const cantilevered = new Set(cantileveredSpans({ task }));
+  const { towerEveryM } = steelBoxData.cantilever;
+  return task.spansM.map((span, i) =>
+    cantilevered.has(i) ? 0 : Math.max(0, Math.ceil(span / towerEveryM - 1e-9) - 1),
+  );
+}
+
 /** Towers under the spans that are put together on them, and their height in all, m. */
 export function temporaryTowers({ task }: SteelBoxModel): { count: number; heightM: number; known: boolean } {
   const { spansM, clearUnderM, depthM } = task;
   const known = clearUnderM !== undefined && clearUnderM.length === spansM.length + 1;
-  if (task.method === 'launch') return { count: 0, heightM: 0, known };
-  const cantilevered = new Set(cantileveredSpans({ task }));
   const assumedM = Math.max(0, steelBoxData.assumedHeightM.value - depthM);
   const soffit = (j: number): number => (known ? clearUnderM[j]! : assumedM);
   let count = 0;
   let heightM = 0;
-  spansM.forEach((span, i) => {
-    if (cantilevered.has(i)) return;
-    const towers = Math.max(0, Math.ceil(span / steelBoxData.cantilever.towerEveryM - 1e-9) - 1);
+  towersInSpans(task).forEach((towers, i) => {
     count += towers;
     heightM += towers * ((soffit(i) + soffit(i + 1)) / 2);
   });

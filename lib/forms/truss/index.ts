@@ -3,13 +3,14 @@ import type { Check, Design, MeasuredLine, SupportReaction, UnitTask } from '../
 import { checkUnitTask } from '../common/checkUnitTask.ts';
 import { check, limiting } from '../common/checks.ts';
 import { constantDepth } from '../common/depthAlong.ts';
+import { evenTowers } from '../common/evenTowers.ts';
 import { skewPlanesWarnings } from '../common/skewPlanes.ts';
 import { supportPositions, totalLength } from '../common/supports.ts';
 import { overLimit } from '../common/warnings.ts';
 import type { FormModule } from '../formModule.ts';
 import { trussData } from './trussData.ts';
 import { trussElevation, trussSectionAt } from './trussDrawing.ts';
-import { temporaryLines, trussLines } from './trussLines.ts';
+import { temporaryLines, towersUnder, trussLines } from './trussLines.ts';
 import { longestTrussM, trussSpan, type TrussSpan } from './trussSpan.ts';
 import type { MemberRole } from './trussGeometry.ts';
 
@@ -28,6 +29,7 @@ export const truss: FormModule = {
   pattern: { kind: 'simple-main', approach: 'composite-i' },
   methods: ['crane', 'float-in'],
   mostSpanM: longestTrussM(),
+  temporaryTowersM: ({ spansM, method }) => evenTowers(spansM, (spanM) => towersUnder(spanM, method)),
   size,
 };
 

@@ -92,10 +92,13 @@ export function trussLines(span: TrussSpan, task: UnitTask): MeasuredLine[] {
   return lines;
 }
 
+/** Towers under one truss of a span while it is put together by crane; none where it is floated in. */
+export const towersUnder = (spanM: number, method: UnitTask['method']): number =>
+  method === 'crane' ? Math.max(0, Math.ceil(spanM / trussData.temporaryTowers.freeSpanM - 1e-9) - 1) : 0;
+
 /** Towers that hold a truss up while it is put together by crane; nothing for a span that is floated in. */
 export function temporaryLines(span: TrussSpan, heightM: number, task: UnitTask): MeasuredLine[] {
-  if (task.method !== 'crane') return [];
-  const towers = Math.max(0, Math.ceil(span.spanM / trussData.temporaryTowers.freeSpanM - 1e-9) - 1);
+  const towers = towersUnder(span.spanM, task.method);
   if (towers === 0) return [];
   const how = `2 x ${towers} towers of ${heightM.toFixed(1)} m, one about every ${trussData.temporaryTowers.freeSpanM} m under each truss`;
   return [

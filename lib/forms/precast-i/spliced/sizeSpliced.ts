@@ -98,6 +98,6 @@ function tried(task: UnitTask, choice: BeamChoice): Tried {
 }
 
 /** True where a unit has to be spliced: a span longer than what the road takes in one piece. */
-export function mustBeSpliced(task: UnitTask): boolean {
-  return Math.max(...task.spansM) > pretensioned.haul.lengthM;
+export function mustBeSpliced({ spansM }: Pick<UnitTask, 'spansM'>): boolean {
+  return Math.max(...spansM) > pretensioned.haul.lengthM;
 }
