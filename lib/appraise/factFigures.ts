@@ -169,6 +169,10 @@ export const factFigures: readonly Descriptor[] = [
       hard ? [`site/zones/${i}/fromM`, `site/zones/${i}/toM`] : [],
     ),
   })),
+  fact('waterUnderRatio', 'longest stretch of water under the main unit / its length', (at) => ({
+    ...mainEnds(at),
+    waters: at.site.waters.flatMap((_, i) => [`site/waters/${i}/fromM`, `site/waters/${i}/toM`]),
+  })),
   fact('prestressed', 'strand is measured in the main unit', (at) => ({
     lines: at.option.designs[main(at)]!.lines.map((_, i) => `${design(at)}/lines/${i}/quantity`),
   })),

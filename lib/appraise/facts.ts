@@ -113,6 +113,13 @@ function towersBarred(site: Site, method: MethodId, main: Unit): number {
   return towers.filter((x) => isBarred(main.supportsM[0]! + x)).length;
 }
 
+/** Longest stretch of water under the main unit over its length. */
+function waterUnderRatio(site: Site, { supportsM }: Unit): number {
+  const [from, to] = [supportsM[0]!, supportsM.at(-1)!];
+  const wet = site.waters.map(({ fromM, toM }) => Math.min(to, toM) - Math.max(from, fromM));
+  return Math.max(0, ...wet) / (to - from);
+}
+
 /** What is known of where the supports stand, and of the heights over them: under an ordinary deck unless it is given. */
 export function arrangementFacts(
   site: Site,
@@ -146,6 +153,7 @@ export function arrangementFacts(
     openSkewM: openSkewM(site),
     ...buildingHeights(site, option.method, main, over),
     towersBarred: towersBarred(site, option.method, main),
+    waterUnderRatio: waterUnderRatio(site, main),
     ...(option.method === 'falsework' ? falseworkOver(site, main) : {}),
     ...(main.pylons ? { pylons: main.pylons.length, sideSpanRatio: sideSpanRatio(main, main.pylons) } : {}),
     ...(spans.length > 1 && !main.pylons ? { endSpanRatio: endSpanRatio(spans) } : {}),

@@ -1,6 +1,6 @@
 import { arrange, fits, flatTable, governingSpan } from '../arrange/index.ts';
 import { formModule } from '../forms/index.ts';
-import type { Arrangement, FormId, MethodId, Pattern, Unit } from '../model/index.ts';
+import type { Arrangement, Effect, FormId, MethodId, Pattern, Unit } from '../model/index.ts';
 import { rule, rulingsFor, spanWindow } from '../rules/index.ts';
 import { openSpans } from './openSpans.ts';
 import { overWindows, supportsOf } from './overWindows.ts';
@@ -16,13 +16,16 @@ import type { Workbench } from './workbench.ts';
 /** Proposals of one form at most. */
 const PER_FORM = 3;
 
-/** Whether the rules warn of the method by which an arrangement is to be built. */
-function meetsTrouble(bench: Workbench, arrangement: Arrangement): boolean {
-  return rulingsFor('arrangement', arrangement.form, arrangementFacts(bench.site, arrangement)).some(
-    (ruling) =>
-      (ruling.effect === 'out' || ruling.effect === 'caution') && rule(ruling.rule).subject === 'erection',
+/** Whether the rules say one of these things of the method by which an arrangement is to be built. */
+function isToldOfErection({ site }: Workbench, one: Arrangement, effects: readonly Effect[]): boolean {
+  return rulingsFor('arrangement', one.form, arrangementFacts(site, one)).some(
+    (ruling) => effects.includes(ruling.effect) && rule(ruling.rule).subject === 'erection',
   );
 }
+
+/** Whether they warn of the method, or put it out. */
+const meetsTrouble = (bench: Workbench, one: Arrangement): boolean =>
+  isToldOfErection(bench, one, ['out', 'caution']);
 
 /**
  * Why a form is not searched in this study: no span of it or of its approach fits between the abutments, or the rules put
@@ -148,7 +151,10 @@ function* search(bench: Workbench, form: FormId): Work<Proposals> {
 
   const byMethod: (readonly Arrangement[])[] = [];
   for (const method of formModule(form).methods) {
-    const found = yield* byOne(method);
+    const all = yield* byOne(method);
+    // A method that cannot be had here is no way out of the trouble with the usual one.
+    const found = byMethod.length === 0 ? all : all.filter((one) => !isToldOfErection(bench, one, ['out']));
+    count('cannot be built by another method here', all.length - found.length);
     byMethod.push(found);
     if (found[0] && !meetsTrouble(bench, found[0])) break;
   }

@@ -80,6 +80,27 @@ describe('proposalsFor(form built out from its piers)', () => {
   });
 });
 
+describe('proposalsFor(truss)', () => {
+  it('floats nothing in where there is no water, though towers would stand on the road that is crossed', () => {
+    const found = proposed(flat(70, [6, 64], 'truss'));
+    expect(new Set(found.map(({ method }) => method))).toEqual(new Set(['crane']));
+  });
+
+  it('is floated in as well over water in which towers would stand', () => {
+    const study = flat(70, [6, 64], 'truss');
+    const water = {
+      ...lowFerry().brief.waters[0]!,
+      fromM: 12,
+      toM: 58,
+      floodFromM: 12,
+      floodToM: 58,
+      levelM: 11,
+    };
+    const wet: Study = { ...study, brief: { ...study.brief, waters: [{ ...water, floodLevelM: 11.5 }] } };
+    expect(new Set(proposed(wet).map(({ method }) => method))).toEqual(new Set(['crane', 'float-in']));
+  });
+});
+
 describe('proposalsFor(viaduct on level ground)', () => {
   it.each(['composite-i', 'concrete-box', 'composite-box'] as const)(
     '%s: inner spans about even, none far longer than a road of 20 m asks for',
