@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import type { Facts, FactValue } from '../../lib/model/index.ts';
+import { methodIds, type Facts, type FactValue } from '../../lib/model/index.ts';
 import {
   evaluate,
   factDictionary,
@@ -17,11 +17,7 @@ const dictionary = new Map(factDictionary.map((fact) => [fact.id, fact]));
 
 /** Values of one fact of a rule: round its limits, on them, far from them, and unknown. */
 function valuesOf(id: string, condition: Condition): fc.Arbitrary<FactValue> {
-  const {
-    kind,
-    step = 1,
-    values = ['launch', 'falsework', 'crane', 'balanced-cantilever'],
-  } = dictionary.get(id)!;
+  const { kind, step = 1, values = methodIds } = dictionary.get(id)!;
   if (kind === 'boolean') return fc.constantFrom<FactValue>(true, false, 'unknown');
   if (kind === 'text') return fc.constantFrom<FactValue>(...values, 'unknown');
   const limits = limitsOn(condition, id, {});
